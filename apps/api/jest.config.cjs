@@ -1,0 +1,12 @@
+/** @type {import('jest').Config} */
+module.exports = {
+  testEnvironment: 'node',
+  testEnvironmentOptions: {
+    customExportConditions: ['source', 'node', 'node-addons'],
+  },
+  rootDir: '.',
+  testMatch: ['<rootDir>/src/**/*.spec.ts', '<rootDir>/test/**/*.e2e-spec.ts'],
+  transform: { '^.+\\.ts$': ['@swc/jest', require('./swc-jest.cjs')] },
+  moduleNameMapper: { '^(\\.{1,2}/.*)\\.js$': '$1' },
+  testTimeout: 20000,
+};

@@ -1,0 +1,2 @@
+export * from './parts/part.ts';
+export * from './room/document.ts';

@@ -1,0 +1,62 @@
+/** Three numbers: x right, y up, z towards the viewer; millimetres unless said otherwise. */
+export type Vec3 = readonly [number, number, number];
+
+/** What a part is in the built piece. */
+export type PartRole =
+  | 'deck'
+  | 'riser'
+  | 'kick'
+  | 'bearer'
+  | 'lip'
+  | 'seat-cushion'
+  | 'back-board'
+  | 'back-frame'
+  | 'back-cushion'
+  | 'end-wall'
+  | 'arm'
+  | 'top'
+  | 'edge-lip'
+  | 'apron'
+  | 'leg'
+  | 'rail'
+  | 'column'
+  | 'foot'
+  | 'sill-board'
+  | 'frame'
+  | 'glass'
+  | 'wall-board'
+  | 'wall-panel'
+  | 'beam'
+  | 'seat';
+
+/** What a part is made of; colours live with the viewer. */
+export type MaterialKey = 'oak' | 'walnut' | 'cloth' | 'wall' | 'glass' | 'ply';
+
+/**
+ * A solid in its own frame, centred on the origin.
+ * `box` is width x height x depth along x, y, z. `cylinder` stands along y.
+ * `prism` is a counter-clockwise outline in x-y, extruded along z, centred in z only.
+ */
+export type Solid =
+  | { shape: 'box'; sizeMm: Vec3 }
+  | { shape: 'cylinder'; radiusMm: number; heightMm: number }
+  | { shape: 'prism'; outlineMm: readonly (readonly [number, number])[]; depthMm: number };
+
+/**
+ * One board, panel or cushion of a piece, placed in the room.
+ * The scene, clearances, cushions, drawings and lists all read parts.
+ */
+export interface Part {
+  /** `${pieceId}/${role}-${n}`; stable while the piece keeps its make-up. */
+  id: string;
+  pieceId: string;
+  role: PartRole;
+  material: MaterialKey;
+  solid: Solid;
+  /** Centre in the room frame. */
+  positionMm: Vec3;
+  /** Turned about y first, then x, then z (three.js order 'YXZ'), radians. */
+  rotationRad: Vec3;
+  /** Axis of the part's own frame the grain runs along. */
+  grain?: 'x' | 'y' | 'z';
+}

@@ -1,0 +1,196 @@
+import { TAPE_MEASURE_KEYS } from '@settlewright/anthropometry';
+import { z } from 'zod';
+
+/** Number of the document layout; raised with an upgrade in `upgrades.ts`. */
+export const SCHEMA_VERSION = 1;
+
+/** Most pieces one set may hold. */
+export const MAX_PIECES = 300;
+
+const length = (min: number, max: number) => z.number().min(min).max(max);
+const text = (max: number) => z.string().trim().max(max);
+
+const foam = z.strictObject({
+  /** Shop name of the grade, for example "firm seat". */
+  grade: text(60),
+  densityKgM3: length(10, 200),
+  /** 25 % indentation force deflection in newtons (ASTM D3574). */
+  ifd25N: length(20, 600),
+  supportFactor: length(1.2, 4),
+});
+
+const cushion = z.strictObject({ thicknessMm: length(0, 250), foam });
+
+const boardModule = z.strictObject({ faceMm: length(10, 600), revealMm: length(0, 50) });
+
+const common = {
+  id: z.string().min(1).max(40),
+  mark: z.string().regex(/^[A-Z]{1,2}[0-9]{1,3}$/),
+  name: text(80),
+  /** Place of the piece's own origin on the floor and its turn about the vertical, anticlockwise from above. */
+  at: z.strictObject({ xMm: length(-50000, 50000), zMm: length(-50000, 50000), turnDeg: length(-360, 360) }),
+  accessible: z.boolean(),
+  locked: z.boolean(),
+  note: text(2000),
+};
+
+/** Wall of boards. Origin: middle of its front face at the floor; the face looks along +z. */
+const bulkhead = z.strictObject({
+  kind: z.literal('bulkhead'),
+  ...common,
+  lengthMm: length(100, 20000),
+  heightMm: length(100, 6000),
+  thicknessMm: length(6, 400),
+  boards: boardModule,
+  boardDirection: z.enum(['vertical', 'horizontal']),
+});
+
+const benchEnd = z.strictObject({
+  kind: z.enum(['open', 'arm', 'wall']),
+  thicknessMm: length(0, 200),
+  /** Top of an arm or end wall above the pressed seat. */
+  heightMm: length(0, 1500),
+});
+
+/** Bench. Origin: middle of the rear face of its back at the floor; the sitter looks along +z. */
+const bench = z.strictObject({
+  kind: z.literal('bench'),
+  ...common,
+  lengthMm: length(300, 12000),
+  deckHeightMm: length(100, 1000),
+  /** Effective depth: face of the unpressed back cushion to the seat front. */
+  seatDepthMm: length(200, 1000),
+  /** Front edge up. */
+  seatTiltDeg: length(-5, 15),
+  /** Top of the back above the pressed seat; 0 for a backless bench. */
+  backHeightMm: length(0, 1800),
+  /** From the vertical, leaning away from the sitter. */
+  backLeanDeg: length(0, 30),
+  backThicknessMm: length(10, 200),
+  seatCushion: cushion,
+  backCushion: cushion,
+  base: z.enum(['box', 'open']),
+  kick: z.strictObject({ depthMm: length(0, 400), heightMm: length(0, 400) }),
+  /** Deck and lip stand out before the riser by this much. */
+  lipMm: length(0, 150),
+  ends: z.strictObject({ left: benchEnd, right: benchEnd }),
+  boards: boardModule,
+  places: z.discriminatedUnion('by', [
+    z.strictObject({ by: z.literal('count'), count: z.number().int().min(1).max(40) }),
+    z.strictObject({ by: z.literal('width'), widthMm: length(300, 1500) }),
+  ]),
+  upholstery: z.strictObject({
+    /** A run longer than this is split into equal cushions. */
+    longestCushionMm: length(300, 3000),
+    buttons: z.strictObject({
+      rows: z.number().int().min(0).max(8),
+      everyBoards: z.number().int().min(1).max(40),
+      alignTo: z.enum(['joints', 'board-centres']),
+      on: z.enum(['back', 'seat', 'both']),
+    }),
+  }),
+});
+
+const tableBase = z.discriminatedUnion('kind', [
+  z.strictObject({ kind: z.literal('legs'), sizeMm: length(20, 200), insetMm: length(0, 500) }),
+  z.strictObject({ kind: z.literal('trestles'), insetMm: length(0, 1000), thicknessMm: length(20, 200) }),
+  z.strictObject({
+    kind: z.literal('columns'),
+    count: z.union([z.literal(1), z.literal(2)]),
+    diameterMm: length(40, 500),
+    footLengthMm: length(100, 1500),
+    footHeightMm: length(10, 200),
+  }),
+]);
+
+/** Table. Origin: middle of the top, at the floor; length along x, width along z. */
+const table = z.strictObject({
+  kind: z.literal('table'),
+  ...common,
+  lengthMm: length(200, 8000),
+  widthMm: length(200, 3000),
+  /** Top of the table above the floor. */
+  heightMm: length(300, 1300),
+  topThicknessMm: length(6, 120),
+  /** How far an edge lip hangs below the top's underside; 0 for none. */
+  edgeLipMm: length(0, 150),
+  apron: z.strictObject({ heightMm: length(0, 300), insetMm: length(0, 500) }),
+  base: tableBase,
+});
+
+/** Window sill. Origin: middle of its rear edge at the floor; it stands out along +z. */
+const sill = z.strictObject({
+  kind: z.literal('sill'),
+  ...common,
+  lengthMm: length(100, 20000),
+  /** Top of the sill above the floor. */
+  heightMm: length(100, 2500),
+  depthMm: length(10, 1000),
+  thicknessMm: length(6, 150),
+  opening: z.strictObject({ widthMm: length(0, 20000), heightMm: length(0, 4000), frameMm: length(0, 300) }),
+});
+
+/** Beam or soffit. Origin: its middle, at the floor. */
+const overhead = z.strictObject({
+  kind: z.literal('overhead'),
+  ...common,
+  lengthMm: length(50, 20000),
+  depthMm: length(20, 5000),
+  thicknessMm: length(10, 1000),
+  undersideMm: length(600, 6000),
+});
+
+/** Chair or stool. Origin: middle of the rear of the seat at the floor; the sitter looks along +z. */
+const looseSeat = z.strictObject({
+  kind: z.literal('loose-seat'),
+  ...common,
+  widthMm: length(200, 1000),
+  seatDepthMm: length(200, 800),
+  deckHeightMm: length(200, 1000),
+  seatCushion: cushion,
+  /** Top of the back above the pressed seat; 0 for a stool. */
+  backHeightMm: length(0, 1200),
+  backLeanDeg: length(0, 30),
+  /** Top of the arms above the pressed seat; 0 for an armless seat. */
+  armHeightMm: length(0, 500),
+});
+
+/** Any piece of a set. */
+export const pieceSchema = z.discriminatedUnion('kind', [bulkhead, bench, table, sill, overhead, looseSeat]);
+
+const sitterRef = z.discriminatedUnion('kind', [
+  z.strictObject({ kind: z.literal('cast'), castId: z.uuid() }),
+  z.strictObject({
+    kind: z.literal('mannequin'),
+    bodyData: z.enum(['women', 'men']),
+    measure: z.enum(['stature', ...TAPE_MEASURE_KEYS]),
+    percentile: z.number().gt(0).lt(100),
+  }),
+]);
+
+/** The set document: what the designer draws, and nothing that can be derived from it. */
+export const setDocumentSchema = z.strictObject({
+  schemaVersion: z.literal(SCHEMA_VERSION),
+  pieces: z.array(pieceSchema).max(MAX_PIECES),
+  seating: z.array(
+    z.strictObject({
+      pieceId: z.string().max(40),
+      place: z.number().int().min(1).max(40),
+      sitter: sitterRef,
+    }),
+  ),
+  asked: z.strictObject({
+    backPosture: z.enum(['dining', 'lounge']),
+    /** Who passes behind loose seats (EGRESS-02). */
+    trafficBehind: z.enum(['none', 'edge-past', 'walk-past', 'wheelchair']),
+  }),
+  knownDifferences: z.array(z.strictObject({ id: z.string().min(1).max(40), text: text(1000) })).max(200),
+});
+
+export type SetDocument = z.infer<typeof setDocumentSchema>;
+export type Piece = z.infer<typeof pieceSchema>;
+export type PieceKind = Piece['kind'];
+export type PieceOf<K extends PieceKind> = Extract<Piece, { kind: K }>;
+export type SitterRef = z.infer<typeof sitterRef>;
+export type Foam = z.infer<typeof foam>;
+export type BoardModule = z.infer<typeof boardModule>;
