@@ -30,7 +30,8 @@ const steps = [
     name: 'libraries and API',
     sources: [...shared, 'apps/api/src', 'apps/api/tsconfig.json', 'apps/api/tsconfig.build.json'],
     product: 'apps/api/dist',
-    run: () => execFileSync(bin('tsc'), ['-b', 'apps/api/tsconfig.build.json'], { cwd: root, stdio: 'inherit' }),
+    run: () =>
+      execFileSync(bin('tsc'), ['-b', 'apps/api/tsconfig.build.json'], { cwd: root, stdio: 'inherit' }),
   },
   {
     name: 'web',

@@ -2,8 +2,8 @@
 import { execFileSync, spawn, spawnSync } from 'node:child_process';
 import { createHash, randomBytes } from 'node:crypto';
 import fs from 'node:fs';
-import net from 'node:net';
 import path from 'node:path';
+import { freePort } from './ports.mjs';
 import { root } from './root.mjs';
 
 const isRoot = process.getuid?.() === 0;
@@ -57,32 +57,28 @@ function dataHome(user) {
   return path.join('/var/tmp', `settlewright-${mark}`);
 }
 
-function freePort() {
-  return new Promise((resolve, reject) => {
-    const server = net.createServer();
-    server.on('error', reject);
-    server.listen(0, '127.0.0.1', () => {
-      const { port } = server.address();
-      server.close(() => resolve(port));
-    });
-  });
+/** A process id with its start time, so that a number used again is not taken for the old holder. */
+function identity(pid) {
+  try {
+    const stat = fs.readFileSync(`/proc/${pid}/stat`, 'utf8');
+    return `${pid} ${stat.slice(stat.lastIndexOf(')') + 2).split(' ')[19]}`;
+  } catch {
+    return undefined;
+  }
 }
 
 /** Takes the folder's lock, or answers false when a live process holds it. */
 function lock(dir) {
   const file = path.join(dir, 'lock');
+  const mine = identity(process.pid) ?? String(process.pid);
   try {
-    fs.writeFileSync(file, String(process.pid), { flag: 'wx' });
+    fs.writeFileSync(file, mine, { flag: 'wx' });
     return true;
   } catch {
-    const holder = Number(fs.readFileSync(file, 'utf8'));
-    try {
-      process.kill(holder, 0);
-      return false;
-    } catch {
-      fs.rmSync(file, { force: true });
-      return lock(dir);
-    }
+    const holder = fs.readFileSync(file, 'utf8');
+    if (holder !== '' && identity(Number(holder.split(' ')[0])) === holder) return false;
+    fs.rmSync(file, { force: true });
+    return lock(dir);
   }
 }
 
@@ -98,7 +94,14 @@ function initialise(bin, user, dir) {
     fs.chownSync(passwordFile, user.uid, user.gid);
   }
   const words = [...prefix(user), path.join(bin, 'initdb'), '-D', cluster, '-U', 'settlewright'];
-  words.push('--auth=scram-sha-256', `--pwfile=${passwordFile}`, '-E', 'UTF8', '--locale=C.UTF-8', '--no-sync');
+  words.push(
+    '--auth=scram-sha-256',
+    `--pwfile=${passwordFile}`,
+    '-E',
+    'UTF8',
+    '--locale=C.UTF-8',
+    '--no-sync',
+  );
   execFileSync(words[0], words.slice(1), { stdio: ['ignore', 'ignore', 'inherit'], cwd: dir });
   fs.writeFileSync(marker, new Date().toISOString());
 }
