@@ -1,0 +1,36 @@
+import { Module } from '@nestjs/common';
+import { ConfigModule, type ConfigType } from '@nestjs/config';
+import { ScheduleModule } from '@nestjs/schedule';
+import { LoggerModule } from 'nestjs-pino';
+import { AuditModule } from './audit/audit.module';
+import { AuthModule } from './auth/auth.module';
+import { logParameters } from './common/request-log';
+import { WebAppModule } from './common/web-app.module';
+import { settings } from './config/settings';
+import { DatabaseModule } from './database/database.module';
+import { HealthModule } from './health/health.module';
+import { MailModule } from './mail/mail.module';
+import { RateLimitsModule } from './rate-limits/rate-limits.module';
+import { UsersModule } from './users/users.module';
+import { WorkshopsModule } from './workshops/workshops.module';
+
+@Module({
+  imports: [
+    ConfigModule.forRoot({ isGlobal: true, ignoreEnvFile: true, load: [settings] }),
+    LoggerModule.forRootAsync({
+      inject: [settings.KEY],
+      useFactory: (config: ConfigType<typeof settings>) => logParameters(config.logLevel),
+    }),
+    ScheduleModule.forRoot(),
+    DatabaseModule,
+    RateLimitsModule,
+    MailModule,
+    AuditModule,
+    HealthModule,
+    UsersModule,
+    WorkshopsModule,
+    AuthModule,
+    WebAppModule,
+  ],
+})
+export class AppModule {}

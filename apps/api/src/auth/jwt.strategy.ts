@@ -1,0 +1,31 @@
+import { Injectable } from '@nestjs/common';
+import { PassportStrategy } from '@nestjs/passport';
+import { ExtractJwt, Strategy } from 'passport-jwt';
+import type { CurrentUserInfo } from '../common/access.decorator';
+import { InjectSettings, type Settings } from '../config/settings';
+import { SessionsService } from './sessions.service';
+
+export interface AccessTokenPayload {
+  sub: string;
+  sid: string;
+}
+
+@Injectable()
+export class JwtStrategy extends PassportStrategy(Strategy, 'jwt') {
+  constructor(
+    @InjectSettings() config: Settings,
+    private readonly sessions: SessionsService,
+  ) {
+    super({
+      jwtFromRequest: ExtractJwt.fromAuthHeaderAsBearerToken(),
+      secretOrKey: config.jwtSecret,
+      algorithms: ['HS256'],
+    });
+  }
+
+  /** The session is looked up each time, so that a sign-out holds at once. */
+  async validate(payload: AccessTokenPayload): Promise<CurrentUserInfo | false> {
+    const open = await this.sessions.isOpen(payload.sid, payload.sub);
+    return open ? { id: payload.sub, sessionId: payload.sid } : false;
+  }
+}

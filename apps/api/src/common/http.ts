@@ -1,0 +1,46 @@
+import compression from 'compression';
+import cookieParser from 'cookie-parser';
+import type { NestExpressApplication } from '@nestjs/platform-express';
+import helmet from 'helmet';
+import type { Settings } from '../config/settings';
+import { ProblemFilter } from './problem.filter';
+import { refuseOtherSites } from './same-origin';
+import { createValidationPipe } from './validation';
+
+export const BODY_LIMIT = '3mb';
+
+/** Everything that stands before and around the routes; the same for the server and for the tests. */
+export function setUpHttp(app: NestExpressApplication, config: Settings): void {
+  const secure = config.publicUrl.startsWith('https://');
+  app.disable('x-powered-by');
+  app.set('trust proxy', config.trustProxy);
+  app.set('query parser', 'simple');
+  app.use(
+    helmet({
+      strictTransportSecurity: secure,
+      contentSecurityPolicy: {
+        useDefaults: false,
+        directives: {
+          defaultSrc: ["'self'"],
+          scriptSrc: ["'self'"],
+          // The toast library writes its rules into a style element.
+          styleSrc: ["'self'", "'unsafe-inline'"],
+          imgSrc: ["'self'", 'data:', 'blob:'],
+          objectSrc: ["'none'"],
+          baseUri: ["'none'"],
+          formAction: ["'self'"],
+          frameAncestors: ["'none'"],
+          ...(secure ? { upgradeInsecureRequests: [] } : {}),
+        },
+      },
+    }),
+    compression(),
+    cookieParser(),
+    refuseOtherSites,
+  );
+  app.useBodyParser('json', { limit: BODY_LIMIT });
+  app.setGlobalPrefix('api');
+  app.useGlobalPipes(createValidationPipe());
+  app.useGlobalFilters(new ProblemFilter());
+  app.enableShutdownHooks();
+}

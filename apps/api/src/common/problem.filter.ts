@@ -1,0 +1,79 @@
+import {
+  ArgumentsHost,
+  Catch,
+  type ExceptionFilter,
+  HttpException,
+  HttpStatus,
+  Logger,
+} from '@nestjs/common';
+import type { Response } from 'express';
+import { Problem, type ProblemBody, problemBody } from './problem';
+
+const BODY_LIMIT_WORDS = '3 MB';
+
+@Catch()
+export class ProblemFilter implements ExceptionFilter {
+  private readonly logger = new Logger(ProblemFilter.name);
+
+  catch(exception: unknown, host: ArgumentsHost): void {
+    const response = host.switchToHttp().getResponse<Response>();
+    const body = this.describe(exception);
+    if (response.headersSent) {
+      response.end();
+      return;
+    }
+    response.status(body.status).type('application/problem+json').send(JSON.stringify(body));
+  }
+
+  private describe(exception: unknown): ProblemBody {
+    if (exception instanceof Problem) return exception.body();
+    if (exception instanceof HttpException) return describeHttp(exception);
+    const parser = describeParser(exception);
+    if (parser) return parser;
+    this.logger.error(exception instanceof Error ? (exception.stack ?? exception.message) : exception);
+    return problemBody(500, 'internal-error', 'Something went wrong here. Nothing was changed.');
+  }
+}
+
+const HTTP_CODES: Partial<Record<number, string>> = {
+  [HttpStatus.UNAUTHORIZED]: 'not-signed-in',
+  [HttpStatus.FORBIDDEN]: 'not-allowed',
+  [HttpStatus.NOT_FOUND]: 'not-found',
+  [HttpStatus.SERVICE_UNAVAILABLE]: 'not-ready',
+};
+
+// A path may hold a token, so the framework's "Cannot GET /…" never goes out.
+const HTTP_WORDS: Partial<Record<number, string>> = {
+  [HttpStatus.UNAUTHORIZED]: 'Sign in first.',
+  [HttpStatus.NOT_FOUND]: 'There is nothing at this address.',
+};
+
+function describeHttp(exception: HttpException): ProblemBody {
+  const status = exception.getStatus();
+  const answer = exception.getResponse();
+  const more = status === 503 && typeof answer === 'object' ? { report: answer } : undefined;
+  return problemBody(
+    status,
+    HTTP_CODES[status] ?? 'bad-request',
+    HTTP_WORDS[status] ?? exception.message,
+    undefined,
+    more,
+  );
+}
+
+/** What Express's body parser and router throw before a route is reached. */
+function describeParser(exception: unknown): ProblemBody | null {
+  if (!(exception instanceof Error) || !('status' in exception)) return null;
+  const type = 'type' in exception ? exception.type : undefined;
+  if (type === 'entity.too.large') {
+    return problemBody(413, 'too-large', `More was sent than is accepted: at most ${BODY_LIMIT_WORDS}.`);
+  }
+  if (type === 'entity.parse.failed') {
+    return problemBody(400, 'malformed-json', 'The body is not valid JSON.');
+  }
+  const status = exception.status;
+  if (typeof status === 'number' && status >= 400 && status < 500) {
+    return problemBody(status, 'bad-request', 'The request cannot be read.');
+  }
+  return null;
+}

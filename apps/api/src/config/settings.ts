@@ -1,0 +1,119 @@
+import { randomBytes } from 'node:crypto';
+import { resolve } from 'node:path';
+import { Inject } from '@nestjs/common';
+import { registerAs } from '@nestjs/config';
+import { z } from 'zod';
+
+/** Every fault of the environment at once, so that a wrong start is put right in one go. */
+export class SettingsError extends Error {
+  constructor(readonly faults: string[]) {
+    super(`The settings cannot be used:\n${faults.map((fault) => `  - ${fault}`).join('\n')}`);
+    this.name = 'SettingsError';
+  }
+}
+
+const flag = z
+  .enum(['0', '1', 'true', 'false'], { error: 'accepted: 1, true, 0 or false' })
+  .transform((text) => text === '1' || text === 'true');
+
+const address = (...schemes: string[]) =>
+  z.string().refine((text) => schemes.some((scheme) => text.startsWith(scheme)) && URL.canParse(text), {
+    error: `accepted: an address that starts with ${schemes.join(' or ')}`,
+  });
+
+const port = z.coerce.number({ error: 'accepted: a port from 0 to 65535' }).int().min(0).max(65535);
+
+/** `false`, a number of proxies, or addresses as Express understands them. */
+const trustProxy = z
+  .string()
+  .transform((text): boolean | number | string =>
+    text === 'false' ? false : /^\d+$/.test(text) ? Number(text) : text,
+  );
+
+const shared = {
+  DATABASE_URL: address('postgres://', 'postgresql://'),
+  PORT: port.default(3000),
+  TRUST_PROXY: trustProxy.default(false),
+  DEMO: flag.default(false),
+  WEB_DIST: z.string().min(1).optional(),
+  COOKIE_SECURE: flag.optional(),
+  LOG_LEVEL: z.enum(['trace', 'debug', 'info', 'warn', 'error', 'fatal', 'silent']).default('info'),
+};
+
+const production = z.object({
+  ...shared,
+  HOST: z.string().min(1).default('0.0.0.0'),
+  PUBLIC_URL: address('https://', 'http://'),
+  JWT_SECRET: z.string().min(32, 'accepted: at least 32 characters'),
+  SMTP_URL: address('smtp://', 'smtps://'),
+  MAIL_FROM: z.string().min(3),
+});
+
+const development = z.object({
+  ...shared,
+  HOST: z.string().min(1).default('127.0.0.1'),
+  PUBLIC_URL: address('https://', 'http://').optional(),
+  JWT_SECRET: z.string().min(32, 'accepted: at least 32 characters').optional(),
+  SMTP_URL: address('smtp://', 'smtps://').default('smtp://127.0.0.1:2525'),
+  MAIL_FROM: z.string().min(3).default('Settlewright <no-reply@localhost>'),
+});
+
+const SECRET_NAMES = new Set(['JWT_SECRET', 'DATABASE_URL', 'SMTP_URL']);
+
+export interface Settings {
+  production: boolean;
+  databaseUrl: string;
+  host: string;
+  port: number;
+  publicUrl: string;
+  trustProxy: boolean | number | string;
+  jwtSecret: string;
+  smtpUrl: string;
+  mailFrom: string;
+  /** 0: nothing is sent until asked */
+  mailPollMs: number;
+  cookieSecure: boolean;
+  logLevel: string;
+  demo: boolean;
+  webDist: string | null;
+}
+
+export function readSettings(env: NodeJS.ProcessEnv): Settings {
+  const isProduction = env.NODE_ENV === 'production';
+  // An empty variable is what most process runners pass for "not set".
+  const given = Object.fromEntries(Object.entries(env).filter(([, value]) => value !== ''));
+  const read = isProduction ? production.safeParse(given) : development.safeParse(given);
+  if (!read.success) {
+    throw new SettingsError(read.error.issues.map((issue) => describeFault(issue, env)));
+  }
+  const values = read.data;
+  const publicUrl = (values.PUBLIC_URL ?? `http://localhost:${values.PORT}`).replace(/\/+$/, '');
+  return {
+    production: isProduction,
+    databaseUrl: values.DATABASE_URL,
+    host: values.HOST,
+    port: values.PORT,
+    publicUrl,
+    trustProxy: values.TRUST_PROXY,
+    jwtSecret: values.JWT_SECRET ?? randomBytes(32).toString('base64url'),
+    smtpUrl: values.SMTP_URL,
+    mailFrom: values.MAIL_FROM,
+    mailPollMs: 2000,
+    cookieSecure: values.COOKIE_SECURE ?? publicUrl.startsWith('https://'),
+    logLevel: values.LOG_LEVEL,
+    demo: values.DEMO,
+    webDist: values.WEB_DIST ? resolve(values.WEB_DIST) : null,
+  };
+}
+
+function describeFault(issue: { path: PropertyKey[]; message: string }, env: NodeJS.ProcessEnv): string {
+  const name = String(issue.path[0]);
+  const value = env[name];
+  if (value === undefined || value === '') return `${name} is missing`;
+  const read = SECRET_NAMES.has(name) ? 'a value that is not shown' : JSON.stringify(value);
+  return `${name}: read ${read}; ${issue.message}`;
+}
+
+export const settings = registerAs('settings', () => readSettings(process.env));
+
+export const InjectSettings = () => Inject(settings.KEY);

@@ -1,0 +1,25 @@
+import { Column, Entity, Index, JoinColumn, ManyToOne, PrimaryGeneratedColumn, type Relation } from 'typeorm';
+import { OutboxMail } from './outbox-mail.entity';
+
+@Entity('outbox_attachments')
+@Index(['mailId'])
+export class OutboxAttachment {
+  @PrimaryGeneratedColumn('uuid')
+  id: string;
+
+  @Column('uuid')
+  mailId: string;
+
+  @ManyToOne(() => OutboxMail, (mail) => mail.attachments, { onDelete: 'CASCADE' })
+  @JoinColumn({ name: 'mail_id' })
+  mail: Relation<OutboxMail>;
+
+  @Column('text')
+  filename: string;
+
+  @Column('text')
+  contentType: string;
+
+  @Column('bytea')
+  content: Buffer;
+}

@@ -1,0 +1,28 @@
+import { Column, CreateDateColumn, Entity, PrimaryGeneratedColumn } from 'typeorm';
+
+export const PAPERS = ['a4', 'letter'] as const;
+export type Paper = (typeof PAPERS)[number];
+
+@Entity('workshops')
+export class Workshop {
+  @PrimaryGeneratedColumn('uuid')
+  id: string;
+
+  @Column('text')
+  name: string;
+
+  @Column('text', { default: '' })
+  telephone: string;
+
+  @Column('text', { default: 'letter' })
+  paper: Paper;
+
+  @Column('text', { default: 'UTC' })
+  timeZone: string;
+
+  @Column('boolean', { default: false })
+  isDemo: boolean;
+
+  @CreateDateColumn({ type: 'timestamptz' })
+  createdAt: Date;
+}

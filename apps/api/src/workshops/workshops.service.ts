@@ -1,0 +1,69 @@
+import { Injectable } from '@nestjs/common';
+import { InjectDataSource } from '@nestjs/typeorm';
+import { DataSource, type EntityManager } from 'typeorm';
+import type { Role } from '../common/access.decorator';
+import { Problem } from '../common/problem';
+import { Membership } from './entities/membership.entity';
+import { Workshop } from './entities/workshop.entity';
+
+export interface WorkshopOfUser {
+  id: string;
+  name: string;
+  role: Role;
+  isDemo: boolean;
+}
+
+export type WorkshopChanges = Partial<Pick<Workshop, 'name' | 'telephone' | 'paper' | 'timeZone'>>;
+
+@Injectable()
+export class WorkshopsService {
+  constructor(@InjectDataSource() private readonly dataSource: DataSource) {}
+
+  async get(workshopId: string, manager: EntityManager = this.dataSource.manager): Promise<Workshop> {
+    const workshop = await manager.findOneBy(Workshop, { id: workshopId });
+    if (!workshop) throw Problem.notFound('workshop');
+    return workshop;
+  }
+
+  async findRole(workshopId: string, userId: string): Promise<Role | null> {
+    const membership = await this.dataSource.manager.findOneBy(Membership, { workshopId, userId });
+    return membership?.role ?? null;
+  }
+
+  async ofUser(userId: string): Promise<WorkshopOfUser[]> {
+    const memberships = await this.dataSource.manager.find(Membership, {
+      where: { userId },
+      relations: { workshop: true },
+      order: { createdAt: 'ASC' },
+    });
+    return memberships.map(({ role, workshop }) => ({
+      id: workshop.id,
+      name: workshop.name,
+      role,
+      isDemo: workshop.isDemo,
+    }));
+  }
+
+  /** A new workshop with its first owner. */
+  async create(
+    manager: EntityManager,
+    ownerId: string,
+    workshop: WorkshopChanges & { name: string; isDemo?: boolean },
+  ): Promise<Workshop> {
+    const created = await manager.save(Workshop, manager.create(Workshop, workshop));
+    await this.addMember(manager, created.id, ownerId, 'owner');
+    return created;
+  }
+
+  async change(workshopId: string, changes: WorkshopChanges): Promise<Workshop> {
+    const given = Object.fromEntries(Object.entries(changes).filter(([, value]) => value !== undefined));
+    if (Object.keys(given).length > 0) {
+      await this.dataSource.manager.update(Workshop, { id: workshopId }, given);
+    }
+    return this.get(workshopId);
+  }
+
+  async addMember(manager: EntityManager, workshopId: string, userId: string, role: Role): Promise<void> {
+    await manager.insert(Membership, { workshopId, userId, role });
+  }
+}
