@@ -1,0 +1,101 @@
+import {
+  Description,
+  Dialog as HeadlessDialog,
+  DialogBackdrop,
+  DialogPanel,
+  DialogTitle,
+} from '@headlessui/react';
+import type { FormEvent, ReactNode } from 'react';
+import { Button } from './button.tsx';
+import { classNames } from './class-names.ts';
+import { CloseIcon } from './icons.tsx';
+import { Notice } from './notice.tsx';
+
+interface DialogProps {
+  open: boolean;
+  onClose: () => void;
+  title: string;
+  /** What will happen, in a sentence. */
+  describe?: ReactNode;
+  wide?: boolean;
+  children: ReactNode;
+}
+
+/** A slip over the page that holds the focus until it is answered. */
+export function Dialog({ open, onClose, title, describe, wide = false, children }: DialogProps) {
+  return (
+    <HeadlessDialog open={open} onClose={onClose} className="relative z-40">
+      <DialogBackdrop className="fixed inset-0 bg-[rgb(35_29_22/0.4)]" />
+      <div className="fixed inset-0 overflow-y-auto">
+        <div className="flex min-h-full items-start justify-center p-4 max-phone:items-end max-phone:p-0 tablet:pt-[10vh]">
+          <DialogPanel
+            className={classNames(
+              'relative w-full rounded-md bg-sheet p-6 shadow-slip tablet:p-8',
+              wide ? 'max-w-[60rem]' : 'max-w-[34rem]',
+            )}
+          >
+            <div className="flex items-start justify-between gap-4">
+              <DialogTitle className="text-xl font-light tracking-hero text-balance">{title}</DialogTitle>
+              <button
+                type="button"
+                onClick={onClose}
+                aria-label="Close"
+                className="quick -mt-1 -mr-2 flex size-9 items-center justify-center rounded-sm text-ink-2 hover:bg-sunk hover:text-ink"
+              >
+                <CloseIcon />
+              </button>
+            </div>
+            {describe && (
+              <Description as="div" className="mt-2 text-ink-2">
+                {describe}
+              </Description>
+            )}
+            <div className="mt-5">{children}</div>
+          </DialogPanel>
+        </div>
+      </div>
+    </HeadlessDialog>
+  );
+}
+
+interface FormDialogProps extends DialogProps {
+  /** The verb of the filled button; the title says the same. */
+  verb: string;
+  busyWords?: string;
+  busy?: boolean;
+  /** What was refused and has no field of its own. */
+  problem?: string | null;
+  onSubmit: (event: FormEvent<HTMLFormElement>) => void;
+  cancelWords?: string;
+}
+
+/** A dialog whose filled button repeats the verb. */
+export function FormDialog({
+  verb,
+  busyWords,
+  busy,
+  problem,
+  onSubmit,
+  cancelWords = 'Cancel',
+  children,
+  ...dialog
+}: FormDialogProps) {
+  return (
+    <Dialog {...dialog}>
+      <form noValidate onSubmit={onSubmit}>
+        {problem && (
+          <Notice tone="wont" className="mb-5">
+            {problem}
+          </Notice>
+        )}
+        {children}
+        <div className="mt-6 flex flex-wrap gap-3">
+          <Button type="submit" look="main" busy={busy} busyWords={busyWords}>
+            {verb}
+          </Button>
+          <Button onClick={dialog.onClose}>{cancelWords}</Button>
+        </div>
+      </form>
+    </Dialog>
+  );
+}

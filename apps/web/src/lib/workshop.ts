@@ -1,0 +1,26 @@
+import { useParams } from 'react-router-dom';
+import type { Role } from './contract.ts';
+import { useSession } from './session.ts';
+
+export interface WorkshopAtHand {
+  id: string;
+  name: string;
+  role: Role;
+  isDemo: boolean;
+  /** Owner and designer change productions, cast, sets and orders. */
+  canEdit: boolean;
+  /** The owner alone keeps members and settings. */
+  isOwner: boolean;
+}
+
+/** The workshop of the address; only for pages under `/w/:workshopId`, whose route has checked the membership. */
+export function useWorkshop(): WorkshopAtHand {
+  const { workshopId } = useParams();
+  const found = useSession((state) => state.workshops.find((workshop) => workshop.id === workshopId));
+  if (found === undefined) throw new Error('useWorkshop is used outside the pages of a workshop.');
+  return {
+    ...found,
+    canEdit: found.role === 'owner' || found.role === 'designer',
+    isOwner: found.role === 'owner',
+  };
+}
