@@ -1,0 +1,173 @@
+import type { Vec3 } from '@settlewright/geometry';
+import { project, type ScreenPoint, type ViewFrame, type Viewport } from '../scene/view-frame.ts';
+
+/** Labels are laid out in CSS pixels over the picture; sizes are those of the rendered elements. */
+export interface NameToPlace {
+  id: string;
+  headMm: Vec3;
+  width: number;
+  height: number;
+}
+
+export interface FlagToPlace {
+  id: string;
+  fromMm: Vec3;
+  toMm: Vec3;
+  width: number;
+  height: number;
+}
+
+export interface PlacedName {
+  id: string;
+  /** Middle of the words. */
+  x: number;
+  y: number;
+  head: { x: number; y: number };
+}
+
+export interface PlacedFlag {
+  id: string;
+  x: number;
+  y: number;
+  from: ScreenPoint;
+  to: ScreenPoint;
+  /** Where a leader starts when the flag had to leave its line. */
+  leader?: { x: number; y: number };
+}
+
+interface Box {
+  left: number;
+  right: number;
+  top: number;
+  bottom: number;
+}
+
+const NAME_GAP = 18;
+const NAME_ABOVE_HEADS = 46;
+const EDGE = 6;
+const HEAD_WIDTH_MM = 160;
+const HEAD_HEIGHT_MM = 240;
+
+/** Puts names into one row, in the order of their heads so that no leader crosses another. */
+export function placeNames(frame: ViewFrame, viewport: Viewport, names: readonly NameToPlace[]): PlacedName[] {
+  const heads = names
+    .map((name) => ({ name, head: project(frame, viewport, name.headMm) }))
+    .filter(({ head }) => head.x > -40 && head.x < viewport.width + 40)
+    .sort((a, b) => a.head.x - b.head.x);
+  if (heads.length === 0) return [];
+  const highest = Math.min(...heads.map(({ head }) => head.y));
+  const y = Math.max(14, Math.min(highest - NAME_ABOVE_HEADS, viewport.height - 20));
+  const left: number[] = [];
+  let edge = EDGE;
+  for (const { name, head } of heads) {
+    const at = Math.max(edge, head.x - name.width / 2);
+    left.push(at);
+    edge = at + name.width + NAME_GAP;
+  }
+  let limit = viewport.width - EDGE;
+  for (let n = heads.length - 1; n >= 0; n--) {
+    const width = heads[n]?.name.width ?? 0;
+    left[n] = Math.min(left[n] ?? 0, limit - width);
+    limit = (left[n] ?? 0) - NAME_GAP;
+  }
+  return heads.map(({ name, head }, n) => ({
+    id: name.id,
+    x: (left[n] ?? 0) + name.width / 2,
+    y,
+    head: { x: head.x, y: head.y },
+  }));
+}
+
+const boxAt = (x: number, y: number, width: number, height: number): Box => ({
+  left: x - width / 2,
+  right: x + width / 2,
+  top: y - height / 2,
+  bottom: y + height / 2,
+});
+
+const meet = (a: Box, b: Box, gap = 4): boolean =>
+  a.left < b.right + gap && b.left < a.right + gap && a.top < b.bottom + gap && b.top < a.bottom + gap;
+
+const ALONG = [0.5, 0.36, 0.64, 0.22, 0.78];
+const ASIDE = [26, -26, 48, -48, 72, -72, 100, -100, 136, -136];
+
+/**
+ * Finds a place for each flag: on its line, then along it, then off it with a leader.
+ * Flags keep clear of heads, names and each other and stay on the sheet; they are never turned.
+ */
+export function placeFlags(
+  frame: ViewFrame,
+  viewport: Viewport,
+  flags: readonly FlagToPlace[],
+  headsMm: readonly Vec3[],
+  names: readonly PlacedName[],
+): PlacedFlag[] {
+  const pixels = viewport.height / (2 * frame.halfHeightMm);
+  const taken: Box[] = headsMm.map((head) => {
+    const top = project(frame, viewport, head);
+    const height = HEAD_HEIGHT_MM * pixels;
+    return boxAt(top.x, top.y + height / 2, HEAD_WIDTH_MM * pixels, height);
+  });
+  if (names[0]) taken.push({ left: 0, right: viewport.width, top: names[0].y - 12, bottom: names[0].y + 12 });
+  return flags.map((flag) => {
+    const from = project(frame, viewport, flag.fromMm);
+    const to = project(frame, viewport, flag.toMm);
+    const length = Math.hypot(to.x - from.x, to.y - from.y);
+    const across =
+      length < 1 ? { x: 1, y: 0 } : { x: (to.y - from.y) / length, y: -(to.x - from.x) / length };
+    const isFree = (x: number, y: number): boolean => {
+      const box = boxAt(x, y, flag.width, flag.height);
+      const inside =
+        box.left >= EDGE &&
+        box.right <= viewport.width - EDGE &&
+        box.top >= EDGE &&
+        box.bottom <= viewport.height - EDGE;
+      return inside && !taken.some((other) => meet(box, other));
+    };
+    const on = (t: number) => ({ x: from.x + (to.x - from.x) * t, y: from.y + (to.y - from.y) * t });
+    const middle = on(0.5);
+    const keep = (x: number, y: number, leader: boolean): PlacedFlag => {
+      taken.push(boxAt(x, y, flag.width, flag.height));
+      return { id: flag.id, x, y, from, to, ...(leader ? { leader: middle } : {}) };
+    };
+    // A line much shorter than its flag would vanish behind it.
+    const hides = length < Math.abs(across.x) * flag.height * 1.4 + Math.abs(across.y) * flag.width * 1.25;
+    if (!hides) {
+      for (const t of ALONG) {
+        const at = on(t);
+        if (isFree(at.x, at.y)) return keep(at.x, at.y, false);
+      }
+    }
+    for (const aside of ASIDE) {
+      const reach = Math.sign(aside) * (Math.abs(across.x) * flag.width * 0.5) + aside;
+      const at = { x: middle.x + across.x * reach, y: middle.y + across.y * aside };
+      if (isFree(at.x, at.y)) return keep(at.x, at.y, true);
+    }
+    const x = Math.min(Math.max(middle.x, EDGE + flag.width / 2), viewport.width - EDGE - flag.width / 2);
+    const y = Math.min(Math.max(middle.y, EDGE + flag.height / 2), viewport.height - EDGE - flag.height / 2);
+    return keep(x, y, Math.hypot(x - middle.x, y - middle.y) > 2);
+  });
+}
+
+/** The tape as a path: the line, its two end ticks, and true ticks along one side. */
+export function tapePath(placed: PlacedFlag, lengthMm: number, tickMm: number): string {
+  const { from, to } = placed;
+  const length = Math.hypot(to.x - from.x, to.y - from.y);
+  if (length < 1) return '';
+  const [ux, uy] = [(to.x - from.x) / length, (to.y - from.y) / length];
+  const [nx, ny] = [-uy, ux];
+  const point = (along: number, side: number) =>
+    `${(from.x + ux * along + nx * side).toFixed(1)} ${(from.y + uy * along + ny * side).toFixed(1)}`;
+  const strokes = [
+    `M${point(0, 0)}L${point(length, 0)}`,
+    `M${point(0, -6)}L${point(0, 6)}`,
+    `M${point(length, -6)}L${point(length, 6)}`,
+  ];
+  const gap = lengthMm > 0 ? (length * tickMm) / lengthMm : 0;
+  if (gap >= 3.5) {
+    for (let n = 1; n * gap < length - 1; n++) {
+      strokes.push(`M${point(n * gap, 0)}L${point(n * gap, n % 6 === 0 ? 5 : 3)}`);
+    }
+  }
+  return strokes.join('');
+}

@@ -1,0 +1,176 @@
+import {
+  checkSet,
+  REFERENCE_SITTER_KG,
+  seatSinkMm,
+  type FitSheet,
+  type MeasureKey,
+  type PlaceSituation,
+  type SetSituation,
+} from '@settlewright/anthropometry';
+import {
+  deriveParts,
+  mannequinMesh,
+  measureSet,
+  placeFrames,
+  poseMannequin,
+  type MannequinPose,
+  type Part,
+  type PlaceFrame,
+  type SetDocument,
+} from '@settlewright/geometry';
+import type { CastMember } from '@/lib/contract';
+import type { FitEngine } from './engine';
+import { sitterColour, sitterName, sittersOf } from './sitters';
+
+/** A body at its place, ready to be drawn. */
+export interface SeatedBody {
+  placeId: string;
+  pieceId: string;
+  name: string;
+  colour: number;
+  statureMm: number;
+  /** True when the height itself, or more, was predicted or told. */
+  estimated: boolean;
+  pose: MannequinPose;
+  mesh: ReturnType<typeof mannequinMesh>;
+}
+
+/** Everything that follows from a document. */
+export interface RoomPicture {
+  document: SetDocument;
+  parts: Part[];
+  situation: SetSituation;
+  sheet: FitSheet;
+  bodies: SeatedBody[];
+}
+
+/** What the server makes for readers who may not see measures. */
+export type ServerFitSheet = FitSheet & {
+  detail: 'full' | 'verdicts';
+  bodies: { placeId: string; means: Record<MeasureKey, number>; shoeMm?: number }[];
+};
+
+export interface PictureMaker {
+  picture: (document: SetDocument) => RoomPicture;
+  check: (document: SetDocument) => FitSheet;
+}
+
+interface BodyInput {
+  means: Record<MeasureKey, number>;
+  shoeMm: number;
+  weightKg: number;
+  estimated: boolean;
+}
+
+/** Remembers the last body drawn at a place, so that a change elsewhere costs nothing. */
+function createBodyMaker() {
+  const kept = new Map<string, { key: string; pose: MannequinPose; mesh: SeatedBody['mesh'] }>();
+  return (frame: PlaceFrame, situation: PlaceSituation, body: BodyInput) => {
+    const sinkMm = situation.foam ? seatSinkMm(situation.foam, body.weightKg).sinkMm : 0;
+    const input = { means: body.means, shoeMm: body.shoeMm, frame, situation, sinkMm };
+    const key = JSON.stringify(input);
+    const last = kept.get(frame.placeId);
+    if (last?.key === key) return last;
+    const pose = poseMannequin(input);
+    const made = { key, pose, mesh: mannequinMesh(pose) };
+    kept.set(frame.placeId, made);
+    return made;
+  };
+}
+
+export function createPictureMaker(
+  engine: FitEngine,
+  cast: readonly CastMember[],
+  server?: ServerFitSheet,
+): PictureMaker {
+  const situations = new WeakMap<SetDocument, SetSituation>();
+  const sheets = new WeakMap<SetDocument, FitSheet>();
+  const pictures = new WeakMap<SetDocument, RoomPicture>();
+  const makeBody = createBodyMaker();
+
+  function situationOf(document: SetDocument): SetSituation {
+    const situation = situations.get(document) ?? measureSet(document);
+    situations.set(document, situation);
+    return situation;
+  }
+
+  function check(document: SetDocument): FitSheet {
+    if (server) return server;
+    const sheet =
+      sheets.get(document) ??
+      checkSet({
+        situation: situationOf(document),
+        sitters: sittersOf(document, cast, engine.model),
+        ruleBook: engine.ruleBook,
+        model: engine.model,
+        settings: document.asked,
+      });
+    sheets.set(document, sheet);
+    return sheet;
+  }
+
+  function inputs(document: SetDocument): Map<string, BodyInput> {
+    if (server) {
+      return new Map(
+        server.bodies.map(({ placeId, means, shoeMm }) => [
+          placeId,
+          { means, shoeMm: shoeMm ?? 25, weightKg: REFERENCE_SITTER_KG, estimated: false },
+        ]),
+      );
+    }
+    return new Map(
+      sittersOf(document, cast, engine.model).map(({ placeId, person }) => {
+        const body = engine.model.predict(person);
+        const estimated = !person.exact && Object.keys(person.measured).length === 0;
+        return [
+          placeId,
+          { means: body.means(), shoeMm: person.shoeMm, weightKg: body.weightKg, estimated },
+        ];
+      }),
+    );
+  }
+
+  function bodiesOf(document: SetDocument, situation: SetSituation): SeatedBody[] {
+    const bodies = inputs(document);
+    const frames = new Map(
+      document.pieces.flatMap((piece) => placeFrames(piece)).map((frame) => [frame.placeId, frame]),
+    );
+    return document.seating.flatMap(({ pieceId, place, sitter }): SeatedBody[] => {
+      const placeId = `${pieceId}:${place}`;
+      const frame = frames.get(placeId);
+      const body = bodies.get(placeId);
+      const measured = situation.places.find((candidate) => candidate.placeId === placeId);
+      if (!frame || !body || !measured) return [];
+      const { pose, mesh } = makeBody(frame, measured, body);
+      return [
+        {
+          placeId,
+          pieceId,
+          name: sitterName(sitter, cast),
+          colour: sitterColour(sitter, cast),
+          statureMm: body.means.stature,
+          estimated: body.estimated,
+          pose,
+          mesh,
+        },
+      ];
+    });
+  }
+
+  function picture(document: SetDocument): RoomPicture {
+    const known = pictures.get(document);
+    if (known) return known;
+    const situation = situationOf(document);
+    const made: RoomPicture = {
+      document,
+      parts: deriveParts(document),
+      situation,
+      sheet: check(document),
+      bodies: bodiesOf(document, situation),
+    };
+    pictures.set(document, made);
+    return made;
+  }
+
+  return { picture, check };
+}

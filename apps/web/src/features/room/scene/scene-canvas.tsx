@@ -1,0 +1,129 @@
+import { Canvas, useFrame, useThree } from '@react-three/fiber';
+import { useEffect, useMemo, useRef } from 'react';
+import { OrthographicCamera } from 'three';
+import type { RoomPicture } from '../picture';
+import { BodyFigures } from './body-figures';
+import { Ground } from './ground';
+import { PieceSolids } from './piece-solids';
+import { readPalette } from './palette';
+import { createMaterials, createSharedUniforms } from './shaders';
+import type { ViewController } from './view-controller';
+import { projectionColumns, type ViewFrame } from './view-frame';
+import type { Cut, ViewLetter } from './views';
+
+const METRES = 0.001;
+
+export interface SceneProps {
+  picture: RoomPicture;
+  controller: ViewController;
+  letter: ViewLetter;
+  cut: Cut | undefined;
+  selectedPieceId: string | undefined;
+  showBodies: boolean;
+  /** Raised when the theme changes. */
+  theme: string;
+  /** Receives the figures of the last picture, for tests and for the curious. */
+  report: (figures: { calls: number; triangles: number }) => void;
+}
+
+const inMetres = (frame: ViewFrame): ViewFrame => ({
+  ...frame,
+  perspective: frame.perspective / METRES,
+  eyeMm: [frame.eyeMm[0] * METRES, frame.eyeMm[1] * METRES],
+  centreMm: [frame.centreMm[0] * METRES, frame.centreMm[1] * METRES],
+  halfHeightMm: frame.halfHeightMm * METRES,
+  depthMm: [frame.depthMm[0] * METRES, frame.depthMm[1] * METRES],
+});
+
+function aim(camera: OrthographicCamera, frame: ViewFrame, aspect: number) {
+  camera.position.set(frame.target[0] * METRES, frame.target[1] * METRES, frame.target[2] * METRES);
+  camera.quaternion.set(...frame.orientation);
+  camera.updateMatrixWorld();
+  camera.projectionMatrix.fromArray(projectionColumns(inMetres(frame), aspect));
+  camera.projectionMatrixInverse.copy(camera.projectionMatrix).invert();
+}
+
+function Stage({ picture, controller, letter, cut, selectedPieceId, showBodies, theme, report }: SceneProps) {
+  const camera = useMemo(() => new OrthographicCamera(), []);
+  const shared = useMemo(() => createSharedUniforms(), []);
+  const materials = useMemo(() => createMaterials(shared), [shared]);
+  const { invalidate, size, gl } = useThree();
+  const canvas = gl.domElement;
+  // The theme is read from the tokens, which React does not see change.
+  const palette = useMemo(() => ({ ...readPalette(canvas), theme }), [canvas, theme]);
+
+  useEffect(() => {
+    palette.tones.forEach((tone, n) => shared.uTones.value[n]?.copy(tone));
+    shared.uPen.value.copy(palette.pen);
+    shared.uShade.value.copy(palette.shade);
+    materials.chosenInk.copy(palette.chosen);
+    materials.floor.uniforms.uInk?.value.copy(palette.floor);
+    materials.wall.uniforms.uInk?.value.copy(palette.wall);
+    invalidate();
+  }, [palette, shared, materials, invalidate]);
+
+  useEffect(() => {
+    if (cut) {
+      const distance =
+        cut.toward[0] * cut.pointMm[0] + cut.toward[1] * cut.pointMm[1] + cut.toward[2] * cut.pointMm[2];
+      shared.uCut.value.set(...cut.toward, distance);
+    } else shared.uCut.value.set(0, 0, 0, 1);
+    invalidate();
+  }, [cut, shared, invalidate]);
+
+  useEffect(() => {
+    shared.uSize.value.set(size.width, size.height);
+    invalidate();
+  }, [size, shared, invalidate]);
+
+  useEffect(() => controller.subscribe(() => invalidate()), [controller, invalidate]);
+  useEffect(() => invalidate(), [picture, letter, selectedPieceId, showBodies, invalidate]);
+  useEffect(
+    () => () => Object.values(materials).forEach((item) => 'dispose' in item && item.dispose()),
+    [materials],
+  );
+
+  const lastReport = useRef('');
+  useFrame(({ gl: renderer, scene }) => {
+    const frame = controller.frame();
+    if (!frame) return;
+    aim(camera, frame, size.width / Math.max(1, size.height));
+    renderer.render(scene, camera);
+    const { calls, triangles } = renderer.info.render;
+    const figures = `${calls} ${triangles}`;
+    if (figures !== lastReport.current) {
+      lastReport.current = figures;
+      report({ calls, triangles });
+    }
+  }, 1);
+
+  return (
+    <group scale={METRES}>
+      <Ground picture={picture} letter={letter} materials={materials} />
+      <PieceSolids
+        picture={picture}
+        letter={letter}
+        selectedPieceId={selectedPieceId}
+        materials={materials}
+      />
+      {showBodies && <BodyFigures picture={picture} palette={palette} shared={shared} hull={materials.hull} />}
+    </group>
+  );
+}
+
+/** The drawing itself. It holds no state and takes no input: those live around it. */
+export default function SceneCanvas(props: SceneProps) {
+  return (
+    <Canvas
+      frameloop="demand"
+      dpr={[1, 2]}
+      gl={{ antialias: true, alpha: true, stencil: true }}
+      resize={{ scroll: false, debounce: 0 }}
+      style={{ position: 'absolute', inset: 0, pointerEvents: 'none' }}
+      aria-hidden="true"
+      tabIndex={-1}
+    >
+      <Stage {...props} />
+    </Canvas>
+  );
+}

@@ -1,0 +1,143 @@
+import type { MaterialKey, Part, Solid, Vec3 } from '@settlewright/geometry';
+import { BufferAttribute, BufferGeometry, ShapeUtils, Vector2 } from 'three';
+import { add, normalise, partAxes, scale } from './vectors';
+
+/** Order of the materials in the palette of the shaders. */
+export const MATERIALS: readonly MaterialKey[] = ['oak', 'walnut', 'cloth', 'wall', 'glass', 'ply'];
+
+/** Width class of an edge: 1 is an ink edge, less is the seam between two boards. */
+const SEAM = 0.45;
+const ROUND_SIDES = 32;
+const SEAM_ROLES: readonly Part['role'][] = ['back-board', 'wall-board'];
+
+export interface SolidArrays {
+  positions: number[];
+  normals: number[];
+  materials: number[];
+  /** Ends of straight edges, six numbers a segment. */
+  edges: number[];
+  edgeWeights: number[];
+  /** Triangles of round parts again, for an outline that no straight edge can give. */
+  roundPositions: number[];
+  roundNormals: number[];
+}
+
+type Place = (x: number, y: number, z: number) => Vec3;
+
+function placer(part: Part): { at: Place; along: Place } {
+  const [ax, ay, az] = partAxes(part.rotationRad);
+  const along: Place = (x, y, z) => add(add(scale(ax, x), scale(ay, y)), scale(az, z));
+  return { along, at: (x, y, z) => add(part.positionMm, along(x, y, z)) };
+}
+
+/** Outline of a solid in its own x-y or x-z plane, with what is needed to extrude it. */
+function addFace(out: SolidArrays, corners: Vec3[], normal: Vec3, material: number) {
+  const [a, b, c, d] = corners as [Vec3, Vec3, Vec3, Vec3];
+  for (const corner of [a, b, c, a, c, d]) {
+    out.positions.push(...corner);
+    out.normals.push(...normal);
+    out.materials.push(material);
+  }
+}
+
+function addEdge(out: SolidArrays, a: Vec3, b: Vec3, weight: number) {
+  out.edges.push(...a, ...b);
+  out.edgeWeights.push(weight);
+}
+
+function addBox(out: SolidArrays, part: Part, size: Vec3, material: number, weight: number) {
+  const { at, along } = placer(part);
+  const [x, y, z] = [size[0] / 2, size[1] / 2, size[2] / 2];
+  addFace(out, [at(-x, y, z), at(x, y, z), at(x, y, -z), at(-x, y, -z)], along(0, 1, 0), material);
+  addFace(out, [at(-x, -y, -z), at(x, -y, -z), at(x, -y, z), at(-x, -y, z)], along(0, -1, 0), material);
+  addFace(out, [at(-x, -y, z), at(x, -y, z), at(x, y, z), at(-x, y, z)], along(0, 0, 1), material);
+  addFace(out, [at(x, -y, -z), at(-x, -y, -z), at(-x, y, -z), at(x, y, -z)], along(0, 0, -1), material);
+  addFace(out, [at(x, -y, z), at(x, -y, -z), at(x, y, -z), at(x, y, z)], along(1, 0, 0), material);
+  addFace(out, [at(-x, -y, -z), at(-x, -y, z), at(-x, y, z), at(-x, y, -z)], along(-1, 0, 0), material);
+  for (const s of [-1, 1]) {
+    for (const t of [-1, 1]) {
+      addEdge(out, at(-x, s * y, t * z), at(x, s * y, t * z), weight);
+      addEdge(out, at(s * x, -y, t * z), at(s * x, y, t * z), weight);
+      addEdge(out, at(s * x, t * y, -z), at(s * x, t * y, z), weight);
+    }
+  }
+}
+
+function addCylinder(out: SolidArrays, part: Part, radius: number, height: number, material: number) {
+  const { at, along } = placer(part);
+  const h = height / 2;
+  const start = out.positions.length;
+  for (let n = 0; n < ROUND_SIDES; n++) {
+    const [a, b] = [(n / ROUND_SIDES) * Math.PI * 2, ((n + 1) / ROUND_SIDES) * Math.PI * 2];
+    const [xa, za, xb, zb] = [Math.cos(a), Math.sin(a), Math.cos(b), Math.sin(b)];
+    const [pa, pb] = [at(xa * radius, -h, za * radius), at(xb * radius, -h, zb * radius)];
+    const [qa, qb] = [at(xa * radius, h, za * radius), at(xb * radius, h, zb * radius)];
+    const [na, nb] = [along(xa, 0, za), along(xb, 0, zb)];
+    out.positions.push(...pa, ...qa, ...pb, ...pb, ...qa, ...qb);
+    out.normals.push(...na, ...na, ...nb, ...nb, ...na, ...nb);
+    out.positions.push(...at(0, h, 0), ...qb, ...qa, ...at(0, -h, 0), ...pa, ...pb);
+    for (const face of [along(0, 1, 0), along(0, -1, 0)]) out.normals.push(...face, ...face, ...face);
+    for (let m = 0; m < 12; m++) out.materials.push(material);
+    addEdge(out, qa, qb, 1);
+    addEdge(out, pa, pb, 1);
+  }
+  out.roundPositions.push(...out.positions.slice(start));
+  out.roundNormals.push(...out.normals.slice(start));
+}
+
+function addPrism(
+  out: SolidArrays,
+  part: Part,
+  solid: Extract<Solid, { shape: 'prism' }>,
+  material: number,
+) {
+  const { at, along } = placer(part);
+  const outline = solid.outlineMm;
+  const z = solid.depthMm / 2;
+  const flat = outline.map(([x, y]) => new Vector2(x, y));
+  for (const [a, b, c] of ShapeUtils.triangulateShape(flat, [])) {
+    const corners = [a, b, c].map((n) => outline[n ?? 0] ?? [0, 0]);
+    for (const [x, y] of corners) out.positions.push(...at(x, y, z));
+    for (const [x, y] of [...corners].reverse()) out.positions.push(...at(x, y, -z));
+    for (const face of [along(0, 0, 1), along(0, 0, -1)]) out.normals.push(...face, ...face, ...face);
+    for (let m = 0; m < 6; m++) out.materials.push(material);
+  }
+  outline.forEach(([x0, y0], n) => {
+    const [x1, y1] = outline[(n + 1) % outline.length] ?? [0, 0];
+    const normal = normalise(along(y1 - y0, x0 - x1, 0));
+    addFace(out, [at(x0, y0, z), at(x0, y0, -z), at(x1, y1, -z), at(x1, y1, z)], normal, material);
+    addEdge(out, at(x0, y0, z), at(x1, y1, z), 1);
+    addEdge(out, at(x0, y0, -z), at(x1, y1, -z), 1);
+    addEdge(out, at(x0, y0, -z), at(x0, y0, z), 1);
+  });
+}
+
+/** Merges parts into one list of triangles and one of edges: a few draw calls for the whole set. */
+export function mergeParts(parts: readonly Part[]): SolidArrays {
+  const out: SolidArrays = {
+    positions: [],
+    normals: [],
+    materials: [],
+    edges: [],
+    edgeWeights: [],
+    roundPositions: [],
+    roundNormals: [],
+  };
+  for (const part of parts) {
+    const material = MATERIALS.indexOf(part.material);
+    const weight = SEAM_ROLES.includes(part.role) ? SEAM : 1;
+    if (part.solid.shape === 'box') addBox(out, part, part.solid.sizeMm, material, weight);
+    else if (part.solid.shape === 'cylinder') {
+      addCylinder(out, part, part.solid.radiusMm, part.solid.heightMm, material);
+    } else addPrism(out, part, part.solid, material);
+  }
+  return out;
+}
+
+export function surfaceOf(positions: number[], normals: number[], materials?: number[]): BufferGeometry {
+  const geometry = new BufferGeometry();
+  geometry.setAttribute('position', new BufferAttribute(new Float32Array(positions), 3));
+  geometry.setAttribute('normal', new BufferAttribute(new Float32Array(normals), 3));
+  if (materials) geometry.setAttribute('tone', new BufferAttribute(new Float32Array(materials), 1));
+  return geometry;
+}

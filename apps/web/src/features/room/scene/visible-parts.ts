@@ -1,0 +1,19 @@
+import type { Part, Piece, SetDocument } from '@settlewright/geometry';
+import type { ViewLetter } from './views';
+
+function stands(piece: Piece, letter: ViewLetter): boolean {
+  if (letter === 'D') return piece.kind !== 'overhead';
+  if (piece.kind !== 'bulkhead' || letter === 'C') return true;
+  // A wall that turns its back to the viewer would hide the room behind it.
+  const turn = (piece.at.turnDeg * Math.PI) / 180;
+  const [x, z] = [Math.sin(turn), Math.cos(turn)];
+  return letter === 'A' ? z > -0.5 : letter === 'B' ? x < 0.5 : x + z > -0.3;
+}
+
+/** Parts that are drawn in a view. */
+export function visibleParts(document: SetDocument, parts: readonly Part[], letter: ViewLetter): Part[] {
+  const hidden = new Set(
+    document.pieces.filter((piece) => !stands(piece, letter)).map((piece) => piece.id),
+  );
+  return parts.filter((part) => !hidden.has(part.pieceId));
+}

@@ -1,0 +1,80 @@
+import type { BodyModel, KnownPerson, Sitter } from '@settlewright/anthropometry';
+import type { SetDocument, SitterRef } from '@settlewright/geometry';
+import type { CastMember } from '@/lib/contract';
+
+/** Percentile mannequins offered in the list of who may sit. */
+export const MANNEQUINS: Extract<SitterRef, { kind: 'mannequin' }>[] = [
+  { kind: 'mannequin', bodyData: 'women', measure: 'stature', percentile: 5 },
+  { kind: 'mannequin', bodyData: 'women', measure: 'stature', percentile: 50 },
+  { kind: 'mannequin', bodyData: 'men', measure: 'stature', percentile: 50 },
+  { kind: 'mannequin', bodyData: 'men', measure: 'stature', percentile: 95 },
+];
+
+const ORDINAL_ENDINGS: Partial<Record<string, string>> = { one: 'st', two: 'nd', few: 'rd' };
+const ordinals = new Intl.PluralRules('en', { type: 'ordinal' });
+
+export function ordinal(n: number): string {
+  return `${n}${ORDINAL_ENDINGS[ordinals.select(n)] ?? 'th'}`;
+}
+
+export function mannequinName(ref: Extract<SitterRef, { kind: 'mannequin' }>): string {
+  const who = ref.bodyData === 'women' ? 'Woman' : 'Man';
+  return `${who}, ${ordinal(ref.percentile)} in ${ref.measure.replaceAll('_', ' ')}`;
+}
+
+export const sitterKey = (ref: SitterRef): string =>
+  ref.kind === 'cast' ? ref.castId : `${ref.bodyData}-${ref.measure}-${ref.percentile}`;
+
+export function sitterName(ref: SitterRef, cast: readonly CastMember[]): string {
+  if (ref.kind === 'mannequin') return mannequinName(ref);
+  return cast.find((member) => member.id === ref.castId)?.name ?? 'removed sitter';
+}
+
+/** First name for labels in the picture; mannequins keep the short form "Woman, 5th". */
+export function shortName(name: string): string {
+  const mannequin = /^(Woman|Man), (\d+\w\w)/.exec(name);
+  return mannequin ? `${mannequin[1]}, ${mannequin[2]}` : (name.split(' ')[0] ?? name);
+}
+
+export function sitterColour(ref: SitterRef, cast: readonly CastMember[]): number {
+  if (ref.kind === 'cast') return cast.find((member) => member.id === ref.castId)?.colour ?? 6;
+  return ref.bodyData === 'women' ? 4 : 2;
+}
+
+/** What the checks know of a cast member; `undefined` when this reader may not see measures. */
+export function personOf(member: CastMember): KnownPerson | undefined {
+  if (!member.bodyData) return undefined;
+  const measured = Object.entries(member.measured ?? {}).map(([key, value]) => [key, value.mm]);
+  return {
+    bodyData: member.bodyData,
+    stature: member.statureMm
+      ? { mm: member.statureMm, source: member.statureSource ?? 'told' }
+      : undefined,
+    weightKg: member.weightKg ?? undefined,
+    measured: Object.fromEntries(measured) as KnownPerson['measured'],
+    shoeMm: member.shoeMm ?? 0,
+    clothing: member.clothing ?? 'light',
+  };
+}
+
+const people = new WeakMap<CastMember, KnownPerson | undefined>();
+
+/** Everyone who sits in the document and whose body is known here. */
+export function sittersOf(
+  document: SetDocument,
+  cast: readonly CastMember[],
+  model: BodyModel,
+): Sitter[] {
+  return document.seating.flatMap(({ pieceId, place, sitter }): Sitter[] => {
+    const placeId = `${pieceId}:${place}`;
+    if (sitter.kind === 'mannequin') {
+      const id = `${sitterKey(sitter)}@${placeId}`;
+      return [{ id, name: mannequinName(sitter), kind: 'mannequin', placeId, person: model.mannequin(sitter) }];
+    }
+    const member = cast.find((candidate) => candidate.id === sitter.castId);
+    if (!member) return [];
+    if (!people.has(member)) people.set(member, personOf(member));
+    const person = people.get(member);
+    return person ? [{ id: member.id, name: member.name, kind: 'cast', placeId, person }] : [];
+  });
+}
