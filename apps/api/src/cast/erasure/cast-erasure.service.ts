@@ -1,0 +1,33 @@
+import { Injectable } from '@nestjs/common';
+import { DataSource } from 'typeorm';
+import { AuditService } from '../../audit/audit.service';
+import type { MemberInfo } from '../../common/access.decorator';
+import { RevisionsService } from '../../sets/revisions.service';
+import { CastService } from '../cast.service';
+
+/** Takes a person out of everything that is kept: the cast, the drafts and the sheets of issued revisions. */
+@Injectable()
+export class CastErasureService {
+  constructor(
+    private readonly dataSource: DataSource,
+    private readonly cast: CastService,
+    private readonly revisions: RevisionsService,
+    private readonly audit: AuditService,
+  ) {}
+
+  async erase(member: MemberInfo, productionId: string, castId: string): Promise<void> {
+    const person = await this.cast.find(member, productionId, castId);
+    await this.dataSource.transaction(async (manager) => {
+      const { id, name } = person;
+      const newName = await this.cast.removePersonalData(manager, person);
+      await this.revisions.removePerson(manager, productionId, { id, name }, newName);
+      await this.audit.record(manager, {
+        workshopId: member.workshopId,
+        userId: member.userId,
+        action: 'cast.erased',
+        subjectType: 'cast-member',
+        subjectId: id,
+      });
+    });
+  }
+}

@@ -1,0 +1,83 @@
+import { readFileSync } from 'node:fs';
+import {
+  type BodyModel,
+  checkSet,
+  createBodyModel,
+  type FitSheet,
+  loadRuleBook,
+  MEASURE_INFO,
+  type MeasureKey,
+  type RuleBook,
+  type Sitter,
+} from '@settlewright/anthropometry';
+import { measureSet, type SetDocument, type SitterRef } from '@settlewright/geometry';
+import { Injectable } from '@nestjs/common';
+import type { CastPerson } from '../cast/known-person';
+import { type RoundedBody, roundedBody } from './rounded-body';
+
+function readData(name: string): unknown {
+  return JSON.parse(readFileSync(require.resolve(`@settlewright/seed-data/${name}.json`), 'utf8'));
+}
+
+const ONE: Record<'women' | 'men', string> = { women: 'Woman', men: 'Man' };
+
+/** Makes fit sheets on the server, so that verdicts can be shown to people who may not see measures. */
+@Injectable()
+export class FitCheckService {
+  readonly ruleBook: RuleBook = loadRuleBook(readData('fit-rules'));
+  private readonly model: BodyModel = createBodyModel(readData('populations/ansur2'));
+
+  sheetFor(document: SetDocument, cast: readonly CastPerson[]): FitSheet {
+    return checkSet({
+      situation: measureSet(document),
+      sitters: this.sitters(document, cast),
+      ruleBook: this.ruleBook,
+      model: this.model,
+      settings: document.asked,
+    });
+  }
+
+  /** A body for each taken place, as far as everybody in the workshop may see it. */
+  bodiesFor(document: SetDocument, cast: readonly CastPerson[]): RoundedBody[] {
+    return this.sitters(document, cast).map(({ placeId, person }) =>
+      roundedBody(placeId, person, this.model.predict(person).means()),
+    );
+  }
+
+  private sitters(document: SetDocument, cast: readonly CastPerson[]): Sitter[] {
+    const people = new Map(cast.map((person) => [person.id, person]));
+    return document.seating.flatMap(({ pieceId, place, sitter }): Sitter[] => {
+      const placeId = `${pieceId}:${place}`;
+      if (sitter.kind === 'cast') {
+        const known = people.get(sitter.castId);
+        return known ? [{ ...known, kind: 'cast', placeId }] : [];
+      }
+      const name = mannequinName(sitter);
+      return [
+        {
+          id: `mannequin:${placeId}`,
+          name,
+          kind: 'mannequin',
+          placeId,
+          person: this.model.mannequin(sitter),
+        },
+      ];
+    });
+  }
+}
+
+/** "Woman, 5th in stature". */
+export function mannequinName({
+  bodyData,
+  measure,
+  percentile,
+}: Extract<SitterRef, { kind: 'mannequin' }>): string {
+  return `${ONE[bodyData]}, ${ordinal(percentile)} in ${MEASURE_INFO[measure satisfies MeasureKey].plain}`;
+}
+
+function ordinal(n: number): string {
+  if (!Number.isInteger(n)) return `${n}th`;
+  const tens = n % 100;
+  const suffix = tens >= 11 && tens <= 13 ? 'th' : (['th', 'st', 'nd', 'rd'][n % 10] ?? 'th');
+  return `${n}${suffix}`;
+}

@@ -1,0 +1,144 @@
+import type { SetDocument } from '@settlewright/geometry';
+import { Injectable, Logger } from '@nestjs/common';
+import { InjectRepository } from '@nestjs/typeorm';
+import { type EntityManager, LessThanOrEqual, type Repository } from 'typeorm';
+import { CastService } from '../cast/cast.service';
+import { castPerson } from '../cast/known-person';
+import type { MemberInfo } from '../common/access.decorator';
+import { Problem } from '../common/problem';
+import { FitCheckService } from '../fit-checks/fit-check.service';
+import { DraftDto, type SaveDraftDto } from './dto/draft.dto';
+import type { DesignedSet } from './entities/designed-set.entity';
+import { type Counts, SetDraft } from './entities/set-draft.entity';
+import { readSentDocument } from './sent-document';
+import { SetAccess } from './set-access';
+
+/** Drafts of a set that stay, so that a stale save can be compared with what it began from. */
+const KEPT_DRAFTS = 50;
+
+@Injectable()
+export class DraftsService {
+  private readonly logger = new Logger(DraftsService.name);
+
+  constructor(
+    @InjectRepository(SetDraft) private readonly drafts: Repository<SetDraft>,
+    private readonly access: SetAccess,
+    private readonly cast: CastService,
+    private readonly fit: FitCheckService,
+  ) {}
+
+  async get(member: MemberInfo, productionId: string, setId: string): Promise<SetDraft> {
+    return this.inForce(await this.access.forReading(member, productionId, setId));
+  }
+
+  async save(
+    member: MemberInfo,
+    productionId: string,
+    setId: string,
+    { baseNumber, document: sent }: SaveDraftDto,
+  ): Promise<SetDraft> {
+    await this.access.forChanging(member, productionId, setId);
+    const document = await this.readSent(productionId, sent);
+    return this.drafts.manager.transaction(async (manager) => {
+      const set = await this.access.locked(manager, setId);
+      if (set.draftNumber !== baseNumber) throw await this.conflict(manager, set, baseNumber);
+      set.draftNumber += 1;
+      await manager.save(set);
+      await this.keep(manager, member, set, document);
+      await manager.delete(SetDraft, { setId, number: LessThanOrEqual(set.draftNumber - KEPT_DRAFTS) });
+      return find(manager, set.id, set.draftNumber);
+    });
+  }
+
+  /** The draft that a set stands at. */
+  inForce(set: DesignedSet, manager = this.drafts.manager): Promise<SetDraft> {
+    return find(manager, set.id, set.draftNumber);
+  }
+
+  /** Part of the caller's transaction: stores the document under the set's number. */
+  async keep(
+    manager: EntityManager,
+    member: MemberInfo,
+    set: DesignedSet,
+    document: SetDocument,
+  ): Promise<void> {
+    const counts = await this.count(set.productionId, document, manager);
+    await manager.insert(SetDraft, {
+      setId: set.id,
+      number: set.draftNumber,
+      document,
+      counts,
+      countedAt: new Date(),
+      savedById: member.userId,
+    });
+  }
+
+  /** A document somebody sent: read, and everyone at its places belongs to the production. */
+  async readSent(productionId: string, sent: unknown): Promise<SetDocument> {
+    const document = readSentDocument(sent);
+    const known = new Set((await this.cast.everyone(productionId)).map(({ id }) => id));
+    const strangers = document.seating.flatMap(({ sitter }, index) =>
+      sitter.kind === 'cast' && !known.has(sitter.castId)
+        ? [
+            {
+              path: `document.seating.${index}.sitter.castId`,
+              code: 'unknown-cast-member',
+              message: `nobody in this production has the id ${sitter.castId}`,
+            },
+          ]
+        : [],
+    );
+    if (strangers.length > 0) throw Problem.invalid(strangers);
+    return document;
+  }
+
+  /** The drafts in force of several sets; counts older than the newest change of a person are made again. */
+  async withFreshCounts(productionId: string, sets: DesignedSet[]): Promise<Map<string, SetDraft>> {
+    if (sets.length === 0) return new Map();
+    const found = await this.drafts.find({
+      where: sets.map(({ id, draftNumber }) => ({ setId: id, number: draftNumber })),
+      relations: { savedBy: true },
+    });
+    const people = await this.cast.everyone(productionId);
+    const changedAt = Math.max(0, ...people.map(({ updatedAt }) => updatedAt.getTime()));
+    for (const draft of found.filter(({ countedAt }) => countedAt.getTime() < changedAt)) {
+      draft.counts = this.countsOf(draft.document, people.map(castPerson));
+      draft.countedAt = new Date(changedAt);
+      const { setId, number, counts, countedAt } = draft;
+      await this.drafts.update({ setId, number }, { counts, countedAt });
+    }
+    return new Map(found.map((draft) => [draft.setId, draft]));
+  }
+
+  private async count(
+    productionId: string,
+    document: SetDocument,
+    manager: EntityManager,
+  ): Promise<Counts | null> {
+    return this.countsOf(document, (await this.cast.everyone(productionId, manager)).map(castPerson));
+  }
+
+  /** A save is never lost because its checks could not be made. */
+  private countsOf(document: SetDocument, people: ReturnType<typeof castPerson>[]): Counts | null {
+    try {
+      return this.fit.sheetFor(document, people).counts;
+    } catch (fault) {
+      this.logger.error(fault instanceof Error ? fault.stack : fault);
+      return null;
+    }
+  }
+
+  private async conflict(manager: EntityManager, set: DesignedSet, baseNumber: number): Promise<Problem> {
+    const current = await this.inForce(set, manager);
+    const base = await manager.findOneBy(SetDraft, { setId: set.id, number: baseNumber });
+    return Problem.conflict(
+      'draft-conflict',
+      `Draft ${baseNumber} is no longer the newest: ${current.savedBy?.name ?? 'somebody'} saved draft ${set.draftNumber}.`,
+      { current: DraftDto.of(current), base: base && { number: base.number, document: base.document } },
+    );
+  }
+}
+
+function find(manager: EntityManager, setId: string, number: number): Promise<SetDraft> {
+  return manager.findOneOrFail(SetDraft, { where: { setId, number }, relations: { savedBy: true } });
+}

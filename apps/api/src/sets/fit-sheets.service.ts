@@ -1,0 +1,53 @@
+import type { FitSheet } from '@settlewright/anthropometry';
+import type { SetDocument } from '@settlewright/geometry';
+import { Injectable } from '@nestjs/common';
+import { CastService } from '../cast/cast.service';
+import { type CastPerson, castPerson } from '../cast/known-person';
+import { seesMeasures } from '../cast/sees-measures';
+import type { MemberInfo } from '../common/access.decorator';
+import { FitCheckService } from '../fit-checks/fit-check.service';
+import { verdictsOnly } from '../fit-checks/verdicts-only';
+import { DraftsService } from './drafts.service';
+import type { FitSheetDto } from './dto/fit-sheet.dto';
+import type { SetDraft } from './entities/set-draft.entity';
+import type { SetRevision } from './entities/set-revision.entity';
+
+@Injectable()
+export class FitSheetsService {
+  constructor(
+    private readonly drafts: DraftsService,
+    private readonly cast: CastService,
+    private readonly fit: FitCheckService,
+  ) {}
+
+  /** The sheet of the draft in force, with the cast as it is known now. */
+  async ofDraft(
+    member: MemberInfo,
+    productionId: string,
+    setId: string,
+  ): Promise<{ draft: SetDraft; sheet: FitSheet; shown: FitSheetDto }> {
+    const draft = await this.drafts.get(member, productionId, setId);
+    const people = await this.people(productionId);
+    const sheet = this.fit.sheetFor(draft.document, people);
+    return { draft, sheet, shown: this.shown(member, sheet, draft.document, people) };
+  }
+
+  /** The sheet of a revision as it was stored, as far as the caller may see it. */
+  async ofRevision(member: MemberInfo, productionId: string, revision: SetRevision): Promise<FitSheetDto> {
+    return this.shown(member, revision.fitSheet, revision.document, await this.people(productionId));
+  }
+
+  private shown(
+    member: MemberInfo,
+    sheet: FitSheet,
+    document: SetDocument,
+    people: CastPerson[],
+  ): FitSheetDto {
+    if (seesMeasures(member)) return { detail: 'full', ...sheet };
+    return { detail: 'verdicts', ...verdictsOnly(sheet), bodies: this.fit.bodiesFor(document, people) };
+  }
+
+  private async people(productionId: string): Promise<CastPerson[]> {
+    return (await this.cast.everyone(productionId)).map(castPerson);
+  }
+}

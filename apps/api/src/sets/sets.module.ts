@@ -1,0 +1,44 @@
+import { Module } from '@nestjs/common';
+import { TypeOrmModule } from '@nestjs/typeorm';
+import { CastModule } from '../cast/cast.module';
+import { FitChecksModule } from '../fit-checks/fit-checks.module';
+import { ProductionsModule } from '../productions/productions.module';
+import { BuiltPartsController } from './built-parts.controller';
+import { BuiltPartsService } from './built-parts.service';
+import { DraftsController } from './drafts.controller';
+import { DraftsService } from './drafts.service';
+import { BuiltPart } from './entities/built-part.entity';
+import { DesignedSet } from './entities/designed-set.entity';
+import { RevisionApproval } from './entities/revision-approval.entity';
+import { SetDraft } from './entities/set-draft.entity';
+import { SetNote } from './entities/set-note.entity';
+import { SetRevision } from './entities/set-revision.entity';
+import { FitSheetsService } from './fit-sheets.service';
+import { NotesController } from './notes.controller';
+import { NotesService } from './notes.service';
+import { RevisionsController } from './revisions.controller';
+import { RevisionsService } from './revisions.service';
+import { SetAccess } from './set-access';
+import { SetsController } from './sets.controller';
+import { SetsService } from './sets.service';
+
+@Module({
+  imports: [
+    TypeOrmModule.forFeature([BuiltPart, DesignedSet, RevisionApproval, SetDraft, SetNote, SetRevision]),
+    ProductionsModule,
+    CastModule,
+    FitChecksModule,
+  ],
+  controllers: [SetsController, DraftsController, RevisionsController, NotesController, BuiltPartsController],
+  providers: [
+    SetAccess,
+    SetsService,
+    DraftsService,
+    RevisionsService,
+    FitSheetsService,
+    NotesService,
+    BuiltPartsService,
+  ],
+  exports: [SetsService, RevisionsService],
+})
+export class SetsModule {}
