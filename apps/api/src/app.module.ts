@@ -9,6 +9,7 @@ import { WebAppModule } from './common/web-app.module';
 import { settings } from './config/settings';
 import { DatabaseModule } from './database/database.module';
 import { HealthModule } from './health/health.module';
+import { InvitationsModule } from './invitations/invitations.module';
 import { MailModule } from './mail/mail.module';
 import { RateLimitsModule } from './rate-limits/rate-limits.module';
 import { UsersModule } from './users/users.module';
@@ -30,6 +31,7 @@ import { WorkshopsModule } from './workshops/workshops.module';
     UsersModule,
     WorkshopsModule,
     AuthModule,
+    InvitationsModule,
     WebAppModule,
   ],
 })

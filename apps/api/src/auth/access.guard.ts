@@ -22,10 +22,24 @@ export class AccessGuard extends AuthGuard('jwt') {
       context.getClass(),
     ]);
     if (!rule) return false;
-    if (rule[0] === 'public' || rule[0] === 'link') return true;
+    if (rule[0] === 'public' || rule[0] === 'link') {
+      await this.recogniseIfSignedIn(context);
+      return true;
+    }
     await super.canActivate(context);
     if (rule[0] === 'signed-in') return true;
     return this.isMemberWith(rule as readonly Role[], context.switchToHttp().getRequest<AccessRequest>());
+  }
+
+  /** An open route may still want to know who asks, as when a signed-in person accepts an invitation. */
+  private async recogniseIfSignedIn(context: ExecutionContext): Promise<void> {
+    const { headers } = context.switchToHttp().getRequest<AccessRequest>();
+    if (!headers.authorization) return;
+    try {
+      await super.canActivate(context);
+    } catch {
+      // An ended session is as good as none here.
+    }
   }
 
   private async isMemberWith(roles: readonly Role[], request: AccessRequest): Promise<boolean> {

@@ -8,7 +8,15 @@ import { UsersModule } from '../users/users.module';
 import { WorkshopsModule } from '../workshops/workshops.module';
 import { AccessGuard } from './access.guard';
 import { AccessRulesCheck } from './access-rules-check';
+import { AccountsService } from './accounts.service';
+import { AuthController } from './auth.controller';
+import { CleanUp } from './clean-up';
 import { JwtStrategy } from './jwt.strategy';
+import { MailedTokensService } from './mailed-tokens.service';
+import { PasswordsService } from './passwords.service';
+import { RecoveryController } from './recovery.controller';
+import { RecoveryService } from './recovery.service';
+import { SessionAnswers } from './session-answers';
 import { SessionsService } from './sessions.service';
 
 @Module({
@@ -25,7 +33,19 @@ import { SessionsService } from './sessions.service';
       }),
     }),
   ],
-  providers: [JwtStrategy, SessionsService, AccessRulesCheck, { provide: APP_GUARD, useClass: AccessGuard }],
-  exports: [SessionsService],
+  controllers: [AuthController, RecoveryController],
+  providers: [
+    AccessRulesCheck,
+    AccountsService,
+    CleanUp,
+    JwtStrategy,
+    MailedTokensService,
+    PasswordsService,
+    RecoveryService,
+    SessionAnswers,
+    SessionsService,
+    { provide: APP_GUARD, useClass: AccessGuard },
+  ],
+  exports: [AccountsService, PasswordsService, SessionAnswers, SessionsService],
 })
 export class AuthModule {}

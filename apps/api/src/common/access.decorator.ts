@@ -43,6 +43,12 @@ export const CurrentUser = createParamDecorator((_: unknown, context: ExecutionC
   return user;
 });
 
+/** On an open route: who asks, or null. */
+export const PerhapsUser = createParamDecorator(
+  (_: unknown, context: ExecutionContext): CurrentUserInfo | null =>
+    context.switchToHttp().getRequest<AccessRequest>().user ?? null,
+);
+
 export const Member = createParamDecorator((_: unknown, context: ExecutionContext): MemberInfo => {
   const { member } = context.switchToHttp().getRequest<AccessRequest>();
   if (!member) throw new Error('@Member() stands on a route without workshop roles');

@@ -7,7 +7,8 @@ import { ProblemFilter } from './problem.filter';
 import { refuseOtherSites } from './same-origin';
 import { createValidationPipe } from './validation';
 
-export const BODY_LIMIT = '3mb';
+export const API_PREFIX = 'api';
+const BODY_LIMIT = '3mb';
 
 /** Everything that stands before and around the routes; the same for the server and for the tests. */
 export function setUpHttp(app: NestExpressApplication, config: Settings): void {
@@ -39,7 +40,7 @@ export function setUpHttp(app: NestExpressApplication, config: Settings): void {
     refuseOtherSites,
   );
   app.useBodyParser('json', { limit: BODY_LIMIT });
-  app.setGlobalPrefix('api');
+  app.setGlobalPrefix(API_PREFIX);
   app.useGlobalPipes(createValidationPipe());
   app.useGlobalFilters(new ProblemFilter());
   app.enableShutdownHooks();

@@ -1,6 +1,6 @@
 import { randomUUID } from 'node:crypto';
 import { Injectable } from '@nestjs/common';
-import type { EntityManager } from 'typeorm';
+import { type EntityManager, In } from 'typeorm';
 import { InjectSettings, type Settings } from '../config/settings';
 import { OutboxAttachment } from './entities/outbox-attachment.entity';
 import { OutboxMail } from './entities/outbox-mail.entity';
@@ -49,6 +49,14 @@ export class MailService {
       .where('id = :mailId AND state IN (:...again)', { mailId, again: ['failed', 'perhaps-sent'] })
       .execute();
     return changed.affected === 1;
+  }
+
+  /** The last mail about something, for whoever asks whether it went out. */
+  async latestAbout(manager: EntityManager, relatedId: string, kinds: readonly string[]): Promise<OutboxMail | null> {
+    return manager.findOne(OutboxMail, {
+      where: { relatedId, kind: In([...kinds]) },
+      order: { queuedAt: 'DESC', id: 'DESC' },
+    });
   }
 
   private newMessageId(): string {

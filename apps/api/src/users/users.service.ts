@@ -1,6 +1,6 @@
 import { Injectable } from '@nestjs/common';
 import { InjectDataSource } from '@nestjs/typeorm';
-import { DataSource, type EntityManager, In } from 'typeorm';
+import { DataSource, type EntityManager, In, IsNull, Not } from 'typeorm';
 import { Problem } from '../common/problem';
 import { User } from './entities/user.entity';
 
@@ -25,8 +25,20 @@ export class UsersService {
     return user;
   }
 
-  async findByEmail(email: string, manager: EntityManager = this.dataSource.manager): Promise<User | null> {
-    return manager.findOneBy(User, { email: comparableEmail(email) });
+  /** The account that confirmed this address. */
+  async findConfirmed(email: string, manager: EntityManager = this.dataSource.manager): Promise<User | null> {
+    return manager.findOneBy(User, { email: comparableEmail(email), emailConfirmedAt: Not(IsNull()) });
+  }
+
+  /** The newest account that gave this address and has not confirmed it. */
+  async findUnconfirmed(
+    email: string,
+    manager: EntityManager = this.dataSource.manager,
+  ): Promise<User | null> {
+    return manager.findOne(User, {
+      where: { email: comparableEmail(email), emailConfirmedAt: IsNull() },
+      order: { createdAt: 'DESC' },
+    });
   }
 
   /** id → name, for lists that say who did something */
@@ -58,7 +70,15 @@ export class UsersService {
     await manager.update(User, { id: userId }, { passwordHash });
   }
 
-  async setConfirmedEmail(manager: EntityManager, userId: string, email: string): Promise<void> {
+  /** Whoever asks has proved to read `email`. It may meanwhile belong to another account. */
+  async confirmEmail(manager: EntityManager, userId: string, email: string): Promise<void> {
+    const holder = await this.findConfirmed(email, manager);
+    if (holder && holder.id !== userId) {
+      throw Problem.conflict(
+        'email-in-use',
+        'This address belongs to another account. Sign in with that one.',
+      );
+    }
     await manager.update(
       User,
       { id: userId },

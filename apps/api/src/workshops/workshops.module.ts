@@ -1,6 +1,12 @@
 import { Module } from '@nestjs/common';
-import { UsersModule } from '../users/users.module';
+import { MembersController } from './members.controller';
+import { MembersService } from './members.service';
+import { WorkshopsController } from './workshops.controller';
 import { WorkshopsService } from './workshops.service';
 
-@Module({ imports: [UsersModule], providers: [WorkshopsService], exports: [WorkshopsService] })
+@Module({
+  controllers: [WorkshopsController, MembersController],
+  providers: [WorkshopsService, MembersService],
+  exports: [WorkshopsService],
+})
 export class WorkshopsModule {}

@@ -25,8 +25,20 @@ export class WorkshopsService {
     return workshop;
   }
 
-  async findRole(workshopId: string, userId: string): Promise<Role | null> {
-    const membership = await this.dataSource.manager.findOneBy(Membership, { workshopId, userId });
+  /** Held until the transaction ends: who belongs to the workshop does not change meanwhile. */
+  async lock(manager: EntityManager, workshopId: string): Promise<Workshop> {
+    const lock = { mode: 'pessimistic_write' } as const;
+    const workshop = await manager.findOne(Workshop, { where: { id: workshopId }, lock });
+    if (!workshop) throw Problem.notFound('workshop');
+    return workshop;
+  }
+
+  async findRole(
+    workshopId: string,
+    userId: string,
+    manager: EntityManager = this.dataSource.manager,
+  ): Promise<Role | null> {
+    const membership = await manager.findOneBy(Membership, { workshopId, userId });
     return membership?.role ?? null;
   }
 

@@ -11,7 +11,11 @@ export class Accounts1796140800000 implements MigrationInterface {
       `CREATE INDEX "audit_entries_at_workshop_id_ix" ON "audit_entries"  ("workshop_id", "at") `,
     );
     await queryRunner.query(
-      `CREATE TABLE "users" ("id" uuid NOT NULL DEFAULT gen_random_uuid(), "name" text NOT NULL, "email" text NOT NULL, "email_confirmed_at" TIMESTAMP WITH TIME ZONE, "password_hash" text NOT NULL, "created_at" TIMESTAMP WITH TIME ZONE NOT NULL DEFAULT now(), CONSTRAINT "users_email_uq" UNIQUE ("email"), CONSTRAINT "users_pk" PRIMARY KEY ("id"))`,
+      `CREATE TABLE "users" ("id" uuid NOT NULL DEFAULT gen_random_uuid(), "name" text NOT NULL, "email" text NOT NULL, "email_confirmed_at" TIMESTAMP WITH TIME ZONE, "password_hash" text NOT NULL, "created_at" TIMESTAMP WITH TIME ZONE NOT NULL DEFAULT now(), CONSTRAINT "users_pk" PRIMARY KEY ("id"))`,
+    );
+    await queryRunner.query(`CREATE INDEX "users_created_at_email_ix" ON "users"  ("email", "created_at") `);
+    await queryRunner.query(
+      `CREATE UNIQUE INDEX "users_email_pix" ON "users"  ("email") WHERE email_confirmed_at IS NOT NULL`,
     );
     await queryRunner.query(
       `CREATE TABLE "mailed_tokens" ("id" uuid NOT NULL DEFAULT gen_random_uuid(), "user_id" uuid NOT NULL, "purpose" text NOT NULL, "email" text NOT NULL, "token_hash" text NOT NULL, "created_at" TIMESTAMP WITH TIME ZONE NOT NULL DEFAULT now(), "expires_at" TIMESTAMP WITH TIME ZONE NOT NULL, "used_at" TIMESTAMP WITH TIME ZONE, CONSTRAINT "mailed_tokens_token_hash_uq" UNIQUE ("token_hash"), CONSTRAINT "mailed_tokens_pk" PRIMARY KEY ("id"))`,
@@ -113,6 +117,8 @@ export class Accounts1796140800000 implements MigrationInterface {
     await queryRunner.query(`DROP TABLE "sessions"`);
     await queryRunner.query(`DROP INDEX "mailed_tokens_purpose_user_id_ix"`);
     await queryRunner.query(`DROP TABLE "mailed_tokens"`);
+    await queryRunner.query(`DROP INDEX "users_email_pix"`);
+    await queryRunner.query(`DROP INDEX "users_created_at_email_ix"`);
     await queryRunner.query(`DROP TABLE "users"`);
     await queryRunner.query(`DROP INDEX "audit_entries_at_workshop_id_ix"`);
     await queryRunner.query(`DROP TABLE "audit_entries"`);

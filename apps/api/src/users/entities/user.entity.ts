@@ -1,6 +1,12 @@
-import { Column, CreateDateColumn, Entity, PrimaryGeneratedColumn } from 'typeorm';
+import { Column, CreateDateColumn, Entity, Index, PrimaryGeneratedColumn } from 'typeorm';
 
+/**
+ * An address belongs to the one account that confirmed it. Unconfirmed accounts may share it, so that signing
+ * up never tells whether an address is known here.
+ */
 @Entity('users')
+@Index(['email'], { unique: true, where: 'email_confirmed_at IS NOT NULL' })
+@Index(['email', 'createdAt'])
 export class User {
   @PrimaryGeneratedColumn('uuid')
   id: string;
@@ -9,7 +15,7 @@ export class User {
   name: string;
 
   /** in lower case, as it is compared */
-  @Column('text', { unique: true })
+  @Column('text')
   email: string;
 
   @Column({ type: 'timestamptz', nullable: true })
