@@ -1,4 +1,16 @@
 export * from './measures/measures.ts';
+export * from './measures/measure-info.ts';
 export * from './people/person.ts';
+export { normalCdf, normalQuantile } from './people/normal.ts';
+export { bivariateNormalCdf } from './people/bivariate.ts';
+export * from './people/estimate.ts';
+export type { Body, JointComponent } from './people/body.ts';
+export * from './people/body-model.ts';
 export * from './checks/situation.ts';
 export * from './checks/fit-sheet.ts';
+export * from './checks/rule-book.ts';
+export * from './checks/seat-sink.ts';
+export { checkSet, type CheckInput } from './checks/check-set.ts';
+export type { CheckSettings } from './checks/piece-check.ts';
+export { codeLoad } from './checks/bench-checks.ts';
+export { fullLegStretchMm } from './checks/table-checks.ts';

@@ -105,6 +105,8 @@ export interface TableSituation {
   mark: string;
   topMm: number;
   accessible: boolean;
+  /** Width of the top between diners who face each other across it; absent when nobody does. */
+  betweenFacingMm?: number;
   /** One entry per edge that somebody sits at. */
   edges: {
     name: 'front' | 'back' | 'left' | 'right';

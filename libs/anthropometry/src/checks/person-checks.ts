@@ -1,0 +1,23 @@
+import type { PersonCheck } from './person-check.ts';
+import { backHeight, hipWidth, seatDepth, seatHeight } from './seat-checks.ts';
+import { elbowToSill, elbowToWall, headroom, sillReach, viewOverSill } from './side-checks.ts';
+import { bellyRoom, footDepth, kneeDepth, kneeRoom, tableHeight, thighRoom } from './table-checks.ts';
+
+/** Rules asked of every sitter, in the order of the sheet's columns. */
+export const PERSON_CHECKS: readonly PersonCheck[] = [
+  seatHeight,
+  seatDepth,
+  hipWidth,
+  thighRoom,
+  kneeRoom,
+  tableHeight,
+  bellyRoom,
+  elbowToSill,
+  sillReach,
+  viewOverSill,
+  kneeDepth,
+  footDepth,
+  headroom,
+  backHeight,
+  elbowToWall,
+];

@@ -1,0 +1,176 @@
+import { z } from 'zod';
+import { MEASURE_KEYS, type MeasureKey } from '../measures/measures.ts';
+import type { RuleScope, RuleUnit, SourceMark } from './fit-sheet.ts';
+
+/** What the screen says for each way a source was read. */
+export const SOURCE_MARK_WORDS: Record<SourceMark, string> = {
+  RETRIEVED: 'read in the source',
+  'FROM MEMORY': 'from memory, not read again',
+  DERIVED: 'worked out here',
+  'HOUSE RULE': 'shop rule',
+};
+
+/** One rule as data: its words, its sources and every number it decides with. */
+export interface Rule {
+  id: string;
+  name: string;
+  /** Short words for the column or line of the sheet. */
+  columnName: string;
+  group: string;
+  scope: RuleScope;
+  unit: RuleUnit;
+  tier: 'guidance' | 'code';
+  /** One plain sentence; `{sitter}` stands for whoever sits there. */
+  why: string;
+  sources: { cite: string; mark: SourceMark }[];
+  /** What the numbers rest on. */
+  thresholdBasis: string;
+  sourceWord: 'published source' | 'common practice' | 'shop rule' | 'from memory';
+  /** Clause of the code, for rules of tier `code`. */
+  clause?: string;
+  /** The rule that reads the public in this rule's column. */
+  publicRule?: string;
+  /** At which end of the population the public is read, and in what words. */
+  publicRead?: {
+    readAs: string;
+    bodyData?: 'women' | 'men';
+    measure?: MeasureKey;
+    percentile?: number;
+  };
+  /** Names end in Mm, In (inches govern) or Deg; shares and percentiles are bare. */
+  numbers: Record<string, number>;
+  /** One example worked by hand. */
+  worked: {
+    given: Record<string, number | string>;
+    expected: Record<string, number | string | boolean>;
+    hand: string;
+  };
+}
+
+/** All rules of one version, in the order of the sheet. */
+export interface RuleBook {
+  version: string;
+  /** Probability from which a verdict is given. */
+  confidence: number;
+  /** How far past a line still counts as on it. */
+  boundaryTolerance: Record<RuleUnit, number>;
+  rules: Rule[];
+  /** @throws RangeError when the book has no such rule */
+  rule(id: string): Rule;
+}
+
+const ruleSchema = z.object({
+  id: z.string().regex(/^[A-Z]+-\d\d$/),
+  name: z.string().min(1),
+  columnName: z.string().min(1),
+  group: z.string().min(1),
+  scope: z.enum(['person', 'pair', 'bench', 'table', 'way', 'set']),
+  unit: z.enum(['mm', 'deg', 'count']),
+  tier: z.enum(['guidance', 'code']),
+  why: z.string().min(1),
+  sources: z
+    .array(
+      z.object({
+        cite: z.string().min(1),
+        mark: z.enum(['RETRIEVED', 'FROM MEMORY', 'DERIVED', 'HOUSE RULE']),
+      }),
+    )
+    .min(1),
+  thresholdBasis: z.string().min(1),
+  sourceWord: z.enum(['published source', 'common practice', 'shop rule', 'from memory']),
+  clause: z.string().optional(),
+  publicRule: z.string().optional(),
+  publicRead: z
+    .object({
+      readAs: z.string().min(1),
+      bodyData: z.enum(['women', 'men']).optional(),
+      measure: z.enum(MEASURE_KEYS).optional(),
+      percentile: z.number().gt(0).lt(100).optional(),
+    })
+    .optional(),
+  numbers: z.record(z.string(), z.number()),
+  worked: z.object({
+    given: z.record(z.string(), z.union([z.number(), z.string()])),
+    expected: z.record(z.string(), z.union([z.number(), z.string(), z.boolean()])),
+    hand: z.string().min(1),
+  }),
+});
+
+const bookSchema = z.object({
+  version: z.string().min(1),
+  confidence: z.number().gt(0.5).lt(1),
+  boundaryTolerance: z.object({
+    mm: z.number().nonnegative(),
+    deg: z.number().nonnegative(),
+    count: z.number().nonnegative(),
+  }),
+  rules: z.array(ruleSchema).min(1),
+});
+
+/**
+ * Reads the rule data and refuses a file that does not hold together.
+ *
+ * @param json - parsed `seed-data/fit-rules.json`
+ * @returns the rule book
+ * @throws Error naming the field, what was read and what is accepted
+ */
+export function loadRuleBook(json: unknown): RuleBook {
+  const parsed = bookSchema.safeParse(json);
+  if (!parsed.success) {
+    const [issue] = parsed.error.issues;
+    throw new Error(`Fit rules: ${issue?.path.join('.') ?? ''}: ${issue?.message ?? 'not readable'}`);
+  }
+  const { version, confidence, boundaryTolerance, rules } = parsed.data;
+  const byId = new Map(rules.map((rule) => [rule.id, rule]));
+  if (byId.size !== rules.length)
+    throw new Error('Fit rules: two rules carry the same id; accepted: one each');
+  return {
+    version,
+    confidence,
+    boundaryTolerance,
+    rules,
+    rule(id) {
+      const rule = byId.get(id);
+      if (!rule) throw new RangeError(`Fit rules: no rule ${id}; accepted: ${[...byId.keys()].join(', ')}`);
+      return rule;
+    },
+  };
+}
+
+const MM_PER_INCH = 25.4;
+
+/**
+ * One number of a rule.
+ *
+ * @param rule - the rule
+ * @param name - name without its unit: `pass` finds `passMm`, `passIn` (times 25.4), `passDeg` or `pass`
+ * @returns millimetres, degrees or the bare number
+ * @throws RangeError when the rule has no such number
+ */
+export function ruleNumber(rule: Rule, name: string): number {
+  const { numbers } = rule;
+  const inches = numbers[`${name}In`];
+  const value =
+    numbers[`${name}Mm`] ??
+    (inches === undefined ? undefined : inches * MM_PER_INCH) ??
+    numbers[`${name}Deg`] ??
+    numbers[name];
+  if (value === undefined) {
+    throw new RangeError(
+      `Fit rules: ${rule.id} has no number ${name}; accepted: ${Object.keys(numbers).join(', ')}`,
+    );
+  }
+  return value;
+}
+
+/**
+ * The plain sentence of a rule about one sitter.
+ *
+ * @param rule - the rule
+ * @param sitter - shown name
+ * @returns a sentence that starts with a capital letter
+ */
+export function whyFor(rule: Rule, sitter: string): string {
+  const sentence = rule.why.replaceAll('{sitter}', sitter);
+  return sentence.charAt(0).toUpperCase() + sentence.slice(1);
+}

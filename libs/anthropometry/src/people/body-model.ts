@@ -1,0 +1,115 @@
+import { MEASURE_KEYS, type MeasureKey } from '../measures/measures.ts';
+import { surveyPercentile } from '../populations/percentiles.ts';
+import { readSurvey, type SurveyGroup } from '../populations/survey.ts';
+import { bodyFrom, type Body, type WeightedPosterior } from './body.ts';
+import { createGroupModel, type Observation } from './group-model.ts';
+import type { BodyData, KnownPerson, PercentileMannequin } from './person.ts';
+
+/** Predicts bodies from what is known of people. */
+export interface BodyModel {
+  /**
+   * What is believed of a person's body.
+   *
+   * @param person - known values in millimetres and kilograms; finite, > 0
+   * @returns the body; the same object for the same person object
+   * @throws RangeError naming the field when a known value is not a positive number
+   */
+  predict(person: KnownPerson): Body;
+  /**
+   * The person that a percentile mannequin stands for: that value of its measure, the conditional mean of the rest.
+   *
+   * @param mannequin - group, measure and percentile
+   * @returns an exact person
+   */
+  mannequin(mannequin: PercentileMannequin): KnownPerson;
+  /**
+   * A percentile of one measure in the surveyed group.
+   *
+   * @param bodyData - women, men, or `mixed` for as many of each
+   * @param key - body measure
+   * @param p - strictly between 0 and 100
+   * @returns millimetres (kilograms for weight)
+   */
+  percentile(bodyData: BodyData, key: MeasureKey, p: number): number;
+}
+
+/**
+ * Builds the body model of one surveyed population.
+ *
+ * @param summary - parsed JSON of the survey statistics, for example `seed-data/populations/ansur2.json`
+ * @returns the model; it keeps its factorisations and predictions, and is otherwise pure
+ * @throws Error naming the field when the statistics do not hold together
+ * @source each sex a multivariate normal of the survey's means, spreads and correlations
+ */
+export function createBodyModel(summary: unknown): BodyModel {
+  const survey = readSurvey(summary);
+  const groups = { women: createGroupModel(survey, 'women'), men: createGroupModel(survey, 'men') };
+  const bodies = new WeakMap<KnownPerson, Body>();
+  const mannequins = new Map<string, KnownPerson>();
+
+  const partOf = (group: SurveyGroup, person: KnownPerson): WeightedPosterior => ({
+    weight: 1,
+    group: groups[group],
+    posterior: groups[group].condition(observationsOf(person, survey.selfReportedStature[group])),
+  });
+
+  function partsOf(person: KnownPerson): WeightedPosterior[] {
+    if (person.bodyData !== 'mixed') return [partOf(person.bodyData, person)];
+    const women = partOf('women', person);
+    const men = partOf('men', person);
+    const shareOfMen = 1 / (1 + Math.exp(women.posterior.logLikelihood - men.posterior.logLikelihood));
+    return [
+      { ...women, weight: 1 - shareOfMen },
+      { ...men, weight: shareOfMen },
+    ];
+  }
+
+  return {
+    predict(person) {
+      const known = bodies.get(person);
+      if (known) return known;
+      const body = bodyFrom(person, partsOf(person));
+      bodies.set(person, body);
+      return body;
+    },
+    mannequin({ bodyData, measure, percentile }) {
+      const name = `${bodyData}|${measure}|${percentile}`;
+      const known = mannequins.get(name);
+      if (known) return known;
+      const value = surveyPercentile(survey, bodyData, measure, percentile);
+      const person: KnownPerson = {
+        bodyData,
+        ...(measure === 'stature' ? { stature: { mm: value, source: 'measured' as const } } : {}),
+        ...(measure === 'weight_kg' ? { weightKg: value } : {}),
+        measured: measure === 'stature' || measure === 'weight_kg' ? {} : { [measure]: value },
+        ...survey.mannequin,
+        exact: true,
+      };
+      mannequins.set(name, person);
+      return person;
+    },
+    percentile: (bodyData, key, p) => surveyPercentile(survey, bodyData, key, p),
+  };
+}
+
+/** Known values in a fixed order, so that people known by the same measures share one factorisation. */
+function observationsOf(person: KnownPerson, told: { overMm: number; sdMm: number }): Observation[] {
+  const observations: Observation[] = [];
+  const add = (field: string, key: MeasureKey, value: number, noiseSd = 0) => {
+    if (!Number.isFinite(value) || value <= 0) {
+      throw new RangeError(`${field} is ${value}; accepted: a number above 0`);
+    }
+    observations.push({ key, value, noiseSd });
+  };
+  for (const key of MEASURE_KEYS) {
+    const taken = person.measured[key];
+    if (taken !== undefined) add(`measured.${key}`, key, taken);
+    else if (key === 'weight_kg' && person.weightKg !== undefined) add('weightKg', key, person.weightKg);
+    else if (key === 'stature' && person.stature) {
+      const { mm, source } = person.stature;
+      if (source === 'measured') add('stature.mm', key, mm);
+      else add('stature.mm', key, mm - told.overMm, told.sdMm);
+    }
+  }
+  return observations;
+}
