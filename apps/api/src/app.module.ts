@@ -4,6 +4,8 @@ import { ScheduleModule } from '@nestjs/schedule';
 import { LoggerModule } from 'nestjs-pino';
 import { AuditModule } from './audit/audit.module';
 import { AuthModule } from './auth/auth.module';
+import { CastModule } from './cast/cast.module';
+import { CastErasureModule } from './cast/erasure/cast-erasure.module';
 import { logParameters } from './common/request-log';
 import { WebAppModule } from './common/web-app.module';
 import { settings } from './config/settings';
@@ -11,7 +13,10 @@ import { DatabaseModule } from './database/database.module';
 import { HealthModule } from './health/health.module';
 import { InvitationsModule } from './invitations/invitations.module';
 import { MailModule } from './mail/mail.module';
+import { ProductionDuplicationModule } from './productions/duplication/production-duplication.module';
+import { ProductionsModule } from './productions/productions.module';
 import { RateLimitsModule } from './rate-limits/rate-limits.module';
+import { SetsModule } from './sets/sets.module';
 import { UsersModule } from './users/users.module';
 import { WorkshopsModule } from './workshops/workshops.module';
 
@@ -32,6 +37,11 @@ import { WorkshopsModule } from './workshops/workshops.module';
     WorkshopsModule,
     AuthModule,
     InvitationsModule,
+    ProductionsModule,
+    CastModule,
+    SetsModule,
+    CastErasureModule,
+    ProductionDuplicationModule,
     WebAppModule,
   ],
 })

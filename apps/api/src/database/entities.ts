@@ -2,9 +2,17 @@ import { AuditEntry } from '../audit/entities/audit-entry.entity';
 import { MailedToken } from '../auth/entities/mailed-token.entity';
 import { RefreshToken } from '../auth/entities/refresh-token.entity';
 import { Session } from '../auth/entities/session.entity';
+import { CastMember } from '../cast/entities/cast-member.entity';
 import { Invitation } from '../invitations/entities/invitation.entity';
 import { OutboxAttachment } from '../mail/entities/outbox-attachment.entity';
 import { OutboxMail } from '../mail/entities/outbox-mail.entity';
+import { Production } from '../productions/entities/production.entity';
+import { BuiltPart } from '../sets/entities/built-part.entity';
+import { DesignedSet } from '../sets/entities/designed-set.entity';
+import { RevisionApproval } from '../sets/entities/revision-approval.entity';
+import { SetDraft } from '../sets/entities/set-draft.entity';
+import { SetNote } from '../sets/entities/set-note.entity';
+import { SetRevision } from '../sets/entities/set-revision.entity';
 import { User } from '../users/entities/user.entity';
 import { Membership } from '../workshops/entities/membership.entity';
 import { Workshop } from '../workshops/entities/workshop.entity';
@@ -12,13 +20,21 @@ import { Workshop } from '../workshops/entities/workshop.entity';
 /** Listed one by one: what is not here has no table. */
 export const ENTITIES = [
   AuditEntry,
+  BuiltPart,
+  CastMember,
+  DesignedSet,
   Invitation,
   MailedToken,
   Membership,
   OutboxAttachment,
   OutboxMail,
+  Production,
   RefreshToken,
+  RevisionApproval,
   Session,
+  SetDraft,
+  SetNote,
+  SetRevision,
   User,
   Workshop,
 ];

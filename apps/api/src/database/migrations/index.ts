@@ -1,5 +1,6 @@
 import type { MigrationInterface } from 'typeorm';
 import { Accounts1796140800000 } from './1796140800000-accounts';
+import { SetsAndCast1796141100000 } from './1796141100000-sets-and-cast';
 
 /** In the order in which they run. What is merged is never changed. */
-export const MIGRATIONS: (new () => MigrationInterface)[] = [Accounts1796140800000];
+export const MIGRATIONS: (new () => MigrationInterface)[] = [Accounts1796140800000, SetsAndCast1796141100000];
