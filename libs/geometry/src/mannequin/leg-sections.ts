@@ -1,0 +1,116 @@
+import type { Vec3 } from '../parts/part.ts';
+import { LIMB_COLUMNS, type Cage } from './cage.ts';
+import type { Figure } from './figure.ts';
+import { HIP_FORWARD_MM, HIP_HEIGHT_MM, restAnkle, restKnee, type Stance } from './stance.ts';
+import { add, along, mix, mixPoints, scale, sub, turnAboutX, turnAboutY } from './vector.ts';
+
+/**
+ * Points of one limb ring: `across` and `up` are half axes, column 3 lies at `across`, column 1 at `up`.
+ * `inward` scales the half axis on the far side of `across`.
+ */
+function legRing(centre: Vec3, across: Vec3, up: Vec3, inward = 1): Vec3[] {
+  return Array.from({ length: LIMB_COLUMNS }, (_, column) => {
+    const angle = ((3 - column) * Math.PI) / 4;
+    const power = (x: number): number => (Math.abs(x) < 1e-9 ? 0 : Math.sign(x) * Math.abs(x) ** (2 / 2.2));
+    const c = power(Math.cos(angle));
+    return along(along(centre, across, c < 0 ? c * inward : c), up, power(Math.sin(angle)));
+  });
+}
+
+/** A ring through a front (or top) and a back (or bottom) point. */
+const between = (front: Vec3, back: Vec3, halfWidth: number, inward = 1): Vec3[] =>
+  legRing(mixPoints(front, back, 0.5), [halfWidth, 0, 0], scale(sub(front, back), 0.5), inward);
+
+/** Sections of the left leg as measured: thigh along the seat, shin upright. Rings 1 to 12, then the toe. */
+function restLeg(f: Figure, shoeMm: number): { rings: Vec3[][]; toe: Vec3 } {
+  const { TC, PH, BPL, BKL, MH, FL, FB, k, radius } = f;
+  const h = f.HB / 2;
+  const t = f.KH - PH;
+  const A = 30 + 0.02 * f.CD + f.AD;
+  const Z = HIP_FORWARD_MM + 0.42 * (A - HIP_FORWARD_MM);
+  const kneeX = restKnee(f)[0];
+  const q = radius.knee;
+  const z3 = BPL - 52;
+  const z1 = Math.min(Math.max(Z + 62, A + 6), z3 - 80);
+  const z2 = mix(z1, z3, 0.52);
+  const x2 = mix(0.515 * h, kneeX, 0.5);
+  const sole = -PH;
+  const tread = sole - 6 - shoeMm;
+  const z0 = (BPL + BKL) / 2 - 4;
+  const a = radius.ankle;
+  const heel = z0 - 0.255 * FL;
+  const foot = (share: number, height: number, half: number): Vec3[] =>
+    between([kneeX, sole + height * MH, heel + share * FL], [kneeX, tread, heel + share * FL], half * FB);
+  return {
+    rings: [
+      between([0.515 * h, TC, z1], [0.515 * h, -8, z1], 0.455 * h, 0.5 / 0.455),
+      between([x2, mix(TC, t, 0.28), z2], [x2, -8, z2], mix(0.455 * h, q, 0.36)),
+      between([kneeX, t + 7, z3], [kneeX, -8, z3], q),
+      between([kneeX, t - 22, BKL - 20], [kneeX, 2, BPL + 6], 0.98 * q),
+      between([kneeX, -46 * k, BKL - 6], [kneeX, -46 * k, BPL + 1], 0.91 * q),
+      between([kneeX, -0.36 * PH, BKL - 20], [kneeX, -0.36 * PH, BPL - 7], 0.95 * radius.calf),
+      between([kneeX, sole + 1.32 * MH, z0 + 1.06 * a], [kneeX, sole + 1.32 * MH, z0 - 1.16 * a], 0.87 * a),
+      between([kneeX, sole + 1.12 * MH, z0 + 1.12 * a + 6], [kneeX, sole + 26 - shoeMm / 2, heel], 0.92 * a),
+      between([kneeX, sole + 0.98 * MH, z0 + 1.5 * a + 10], [kneeX, tread - 1, heel + 0.1 * FL], 0.35 * FB),
+      foot(0.55, 0.8, 0.42),
+      foot(0.74, 0.54, 0.5),
+      foot(0.93, 0.36, 0.37),
+    ],
+    toe: [kneeX, sole + 0.14 * MH - shoeMm / 2, heel + 1.005 * FL],
+  };
+}
+
+/** Where the left knee and ankle come to lie, and how the sole stands. */
+export interface LegLine {
+  hip: Vec3;
+  knee: Vec3;
+  ankle: Vec3;
+}
+
+/** Joints of the left leg in a stance. */
+export function legLine(f: Figure, stance: Stance): LegLine {
+  const hipAxis: Vec3 = [0, HIP_HEIGHT_MM, HIP_FORWARD_MM];
+  const rest = restKnee(f);
+  const knee = turnAboutX(rest, hipAxis, stance.thighRad);
+  const shin = turnAboutX(sub(restAnkle(f), rest), [0, 0, 0], stance.shinRad);
+  return { hip: [0.24 * f.HB, HIP_HEIGHT_MM, HIP_FORWARD_MM], knee, ankle: add(knee, shin) };
+}
+
+const FOOT_SHARE = [0.3, 0.5, 0.75, 1, 1, 1];
+
+/**
+ * Writes the section points of both legs into `points`, bent as the stance says.
+ *
+ * @param f - the figure
+ * @param stance - turns of thigh, shin and foot; height of the shoe under the heel in millimetres
+ * @param cage - tells where each point goes
+ * @param points - x, y, z of every cage point, millimetres, body frame
+ */
+export function writeLegs(f: Figure, stance: Stance, cage: Cage, points: Float64Array): void {
+  const { rings, toe } = restLeg(f, stance.shoeMm);
+  const hipAxis: Vec3 = [0, HIP_HEIGHT_MM, HIP_FORWARD_MM];
+  const kneeRest = restKnee(f);
+  const ankleRest = restAnkle(f);
+  const { knee, ankle } = legLine(f, stance);
+  const onFoot = (p: Vec3, share: number): Vec3 => {
+    const moved = add(ankle, sub(p, ankleRest));
+    const pitched = turnAboutX(moved, ankle, mix(stance.shinRad, stance.footRad, share));
+    return turnAboutY(pitched, ankle, stance.toesOutRad * share);
+  };
+  const place = (ring: number, p: Vec3): Vec3 => {
+    if (ring <= 3) return turnAboutX(p, hipAxis, stance.thighRad * (ring === 1 ? 0.8 : 1));
+    if (ring <= 6) {
+      const angle = ring === 4 ? (stance.thighRad + stance.shinRad) / 2 : stance.shinRad;
+      return turnAboutX(add(knee, sub(p, kneeRest)), knee, angle);
+    }
+    return onFoot(p, FOOT_SHARE[ring - 7] ?? 1);
+  };
+  const write = (ids: readonly [number, number], p: Vec3): void => {
+    points.set(p, ids[0] * 3);
+    points.set([-p[0], p[1], p[2]], ids[1] * 3);
+  };
+  rings.forEach((ring, r) => {
+    ring.forEach((p, c) => write([cage.legs[0][r + 1]![c]!, cage.legs[1][r + 1]![c]!], place(r + 1, p)));
+  });
+  write(cage.toes, onFoot(toe, 1));
+}

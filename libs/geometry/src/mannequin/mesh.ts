@@ -1,0 +1,192 @@
+import { turnToRoom } from './body-placement.ts';
+import type { Cage } from './cage.ts';
+import type { MannequinPose } from './pose.ts';
+import { press } from './press.ts';
+import type { MannequinTag } from './segments.ts';
+import { fitCage, skin, skinPoints } from './skin.ts';
+import { solvedFigure } from './solve.ts';
+import { faceTriangles, gridsOf, outwardFlips } from './triangles.ts';
+
+const SIZE = 4;
+/** Order of the tags in a mesh; `tags` holds places in this list. */
+export const MANNEQUIN_TAGS: readonly MannequinTag[] = ['suit', 'head', 'hand', 'shoe'];
+
+/** A closed, smooth, indexed triangle mesh of one sitter in the room frame, millimetres. */
+export interface MannequinMesh {
+  positions: Float32Array;
+  normals: Float32Array;
+  indices: Uint32Array;
+  /** For every vertex its place in `MANNEQUIN_TAGS`; vertices on a border are doubled so that colours stay crisp. */
+  tags: Uint8Array;
+  /** Stretches of `indices` with one tag each. */
+  groups: { tag: MannequinTag; start: number; count: number }[];
+  /** Tailored seams as pairs of vertices. */
+  seams: Uint32Array;
+}
+
+/** What every mesh has in common. */
+interface Template {
+  /** Skin point of every vertex. */
+  source: Uint32Array;
+  indices: Uint32Array;
+  /** The triangles in skin points. */
+  triangles: Uint32Array;
+  tags: Uint8Array;
+  groups: MannequinMesh['groups'];
+  seams: Uint32Array;
+}
+
+const TAG_OF_REGION = { trunk: 0, arm: 0, leg: 0, head: 1, hand: 2, shoe: 3 } as const;
+
+/** Cage edges that carry a seam: centre lines, princess lines, waist, neck, armholes, hips, elbows, knees, wrists, ankles. */
+function seamEdges(cage: Cage): [number, number][] {
+  const edges: [number, number][] = [];
+  const loop = (ids: readonly number[]): void =>
+    ids.forEach((a, i) => {
+      const b = ids[(i + 1) % ids.length]!;
+      if (a >= 0 && b >= 0) edges.push([a, b]);
+    });
+  const chain = (ids: readonly number[]): void => {
+    for (let i = 0; i + 1 < ids.length; i++)
+      if (ids[i]! >= 0 && ids[i + 1]! >= 0) edges.push([ids[i]!, ids[i + 1]!]);
+  };
+  loop(cage.trunk[3]!);
+  loop(cage.trunk[8]!);
+  for (const column of [0, 1, 11, 6, 5, 7]) chain(cage.trunk.slice(1, 9).map((ring) => ring[column]!));
+  for (const side of [0, 1] as const) {
+    loop(cage.arms[side][0]!);
+    for (const ring of [4, 6]) loop(cage.arms[side][ring]!);
+    for (const ring of [4, 7]) loop(cage.legs[side][ring]!);
+    chain(cage.legs[side][0]!.slice(0, 4));
+  }
+  return edges;
+}
+
+function buildTemplate(): Template {
+  const { cage, fine } = skin();
+  const grids = gridsOf(fine.level, cage.faces.length, SIZE);
+  const flips = outwardFlips(cage);
+  const source: number[] = [];
+  const tags: number[] = [];
+  const triangles: number[] = [];
+  const indices: number[] = [];
+  const groups: Template['groups'] = [];
+  const suitVertex = new Map<number, number>();
+  MANNEQUIN_TAGS.forEach((tag, place) => {
+    const vertexOf = new Map<number, number>();
+    const start = indices.length;
+    cage.faces.forEach((face, f) => {
+      if (TAG_OF_REGION[face.region] !== place) return;
+      for (const id of faceTriangles(face, grids[f]!, SIZE, flips[f]!)) {
+        let vertex = vertexOf.get(id);
+        if (vertex === undefined) {
+          vertex = source.length;
+          vertexOf.set(id, vertex);
+          source.push(id);
+          tags.push(place);
+          if (!suitVertex.has(id)) suitVertex.set(id, vertex);
+        }
+        triangles.push(id);
+        indices.push(vertex);
+      }
+    });
+    groups.push({ tag, start, count: indices.length - start });
+  });
+  return {
+    source: Uint32Array.from(source),
+    indices: Uint32Array.from(indices),
+    triangles: Uint32Array.from(triangles),
+    tags: Uint8Array.from(tags),
+    groups,
+    seams: seamVertices(cage, grids, suitVertex),
+  };
+}
+
+/** Seam edges refined along the skin, as pairs of mesh vertices. */
+function seamVertices(cage: Cage, grids: Uint32Array[], vertexOf: Map<number, number>): Uint32Array {
+  const wanted = new Set(seamEdges(cage).map(([a, b]) => (a < b ? `${a},${b}` : `${b},${a}`)));
+  const pairs: number[] = [];
+  cage.faces.forEach((face, f) => {
+    const sides = [
+      (i: number) => i,
+      (i: number) => i * (SIZE + 1) + SIZE,
+      (i: number) => SIZE * (SIZE + 1) + SIZE - i,
+      (i: number) => (SIZE - i) * (SIZE + 1),
+    ];
+    sides.forEach((at, s) => {
+      const a = face.corners[s]!;
+      const b = face.corners[(s + 1) % 4]!;
+      if (!wanted.delete(a < b ? `${a},${b}` : `${b},${a}`)) return;
+      const run = [0, 1, 2, 3, 4].map((i) => vertexOf.get(grids[f]![at(i)]!)).filter((v) => v !== undefined);
+      for (let i = 0; i + 1 < run.length; i++) pairs.push(run[i]!, run[i + 1]!);
+    });
+  });
+  return Uint32Array.from(pairs);
+}
+
+let shared: Template | undefined;
+
+/** Unit normals of the skin points, weighted by the area of the triangles around them. */
+function skinNormals(points: Float64Array, triangles: Uint32Array): Float64Array {
+  const normals = new Float64Array(points.length);
+  for (let t = 0; t < triangles.length; t += 3) {
+    const a = triangles[t]! * 3;
+    const b = triangles[t + 1]! * 3;
+    const c = triangles[t + 2]! * 3;
+    const ux = points[b]! - points[a]!;
+    const uy = points[b + 1]! - points[a + 1]!;
+    const uz = points[b + 2]! - points[a + 2]!;
+    const vx = points[c]! - points[a]!;
+    const vy = points[c + 1]! - points[a + 1]!;
+    const vz = points[c + 2]! - points[a + 2]!;
+    const nx = uy * vz - uz * vy;
+    const ny = uz * vx - ux * vz;
+    const nz = ux * vy - uy * vx;
+    for (const at of [a, b, c]) {
+      normals[at]! += nx;
+      normals[at + 1]! += ny;
+      normals[at + 2]! += nz;
+    }
+  }
+  return normals;
+}
+
+/**
+ * Skin of a posed body.
+ *
+ * The surface is the limit of a subdivision cage lofted through sections of the body, shaped so that in
+ * the measuring posture its extents are the person's measures. About 15 000 triangles.
+ *
+ * @param pose - from `poseMannequin`
+ * @returns one merged mesh in the room frame, millimetres, with unit normals
+ * @source E. Catmull, J. Clark 1978 for the surface; sections by eye over ANSUR II measures
+ */
+export function mannequinMesh(pose: MannequinPose): MannequinMesh {
+  const { fine } = skin();
+  shared ??= buildTemplate();
+  const { source, indices, triangles, tags, groups, seams } = shared;
+  const { drawn } = solvedFigure(pose.means);
+  const points = skinPoints(fine, fitCage(drawn, pose.stance));
+  press(points, fine, drawn, pose.stance);
+  const normals = skinNormals(points, triangles);
+
+  const [ax, ay, az] = [
+    turnToRoom(pose.placement, [1, 0, 0]),
+    turnToRoom(pose.placement, [0, 1, 0]),
+    turnToRoom(pose.placement, [0, 0, 1]),
+  ];
+  const origin = pose.placement.originMm;
+  const outPositions = new Float32Array(source.length * 3);
+  const outNormals = new Float32Array(source.length * 3);
+  for (let v = 0; v < source.length; v++) {
+    const s = source[v]! * 3;
+    const [px, py, pz] = [points[s]!, points[s + 1]!, points[s + 2]!];
+    const [nx, ny, nz] = [normals[s]!, normals[s + 1]!, normals[s + 2]!];
+    const size = Math.hypot(nx, ny, nz) || 1;
+    for (let i = 0; i < 3; i++) {
+      outPositions[v * 3 + i] = origin[i]! + ax[i]! * px + ay[i]! * py + az[i]! * pz;
+      outNormals[v * 3 + i] = (ax[i]! * nx + ay[i]! * ny + az[i]! * nz) / size;
+    }
+  }
+  return { positions: outPositions, normals: outNormals, indices, tags, groups, seams };
+}

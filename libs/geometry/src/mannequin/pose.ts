@@ -1,0 +1,194 @@
+import type { MeasureKey, PlaceSituation } from '@settlewright/anthropometry';
+import type { Vec3 } from '../parts/part.ts';
+import { armOnLap, armOnTable } from './arm-stance.ts';
+import { bodyPlacement, toBody, toRoom, type BodyPlacement } from './body-placement.ts';
+import type { Figure, FigureMeans } from './figure.ts';
+import { readFigure } from './figure.ts';
+import { bodyJoints, type MannequinJoints } from './joints.ts';
+import { bodySegments, type MannequinSegment } from './segments.ts';
+import { HIP_FORWARD_MM, HIP_HEIGHT_MM, restAnkle, restKnee, type Stance } from './stance.ts';
+import { clamp, mix, turnAboutX } from './vector.ts';
+
+/** Where a place stands, as the mannequin needs it; a `PlaceFrame` is one. */
+export interface SeatPoint {
+  /** On the unpressed seat, 135 mm before the back, on the place's centreline; room frame. */
+  hipMm: Vec3;
+  /** Turn about the vertical; 0 looks along +z. */
+  facingRad: number;
+}
+
+/** What of the place's situation bends the body. */
+export type SeatPosture = Pick<
+  PlaceSituation,
+  'effectiveDepthMm' | 'seatTiltRad' | 'backLeanRad' | 'backTopMm'
+> & {
+  table?: Pick<NonNullable<PlaceSituation['table']>, 'topMm' | 'overlapMm'> | undefined;
+};
+
+/** Something about the pose worth saying; `valueMm` where it has a size. */
+export interface PoseNote {
+  kind: 'feet-hang' | 'slides-forward' | 'knees-lift' | 'forearms-on-table' | 'hands-on-lap';
+  valueMm?: number;
+}
+
+/** A seated body: its bends, where it is, and what follows from both. */
+export interface MannequinPose {
+  /** The measures it was made from. */
+  means: FigureMeans;
+  stance: Stance;
+  placement: BodyPlacement;
+  /** Joint centres in the room frame, millimetres. */
+  joints: MannequinJoints;
+  /** Simple solids along the body, room frame, for distances and quick drawings. */
+  segments: MannequinSegment[];
+  notes: PoseNote[];
+  /** The notes in words, millimetres. */
+  words: string[];
+  /** Top of the head above the floor. */
+  headTopMm: number;
+  /** Eye above the floor. */
+  eyeMm: number;
+  /** Sole of the shoe above the floor; 0 when the feet stand. */
+  heelGapMm: number;
+}
+
+const SHIN_FURTHEST_RAD = (28 * Math.PI) / 180;
+const LEAN_FURTHEST_RAD = (20 * Math.PI) / 180;
+const TOES_DOWN_RAD = (18 * Math.PI) / 180;
+/** Room left behind the knee before the sitter slides forward. */
+const BEHIND_KNEE_MM = 50;
+
+interface Legs {
+  thighRad: number;
+  shinRad: number;
+  footRad: number;
+  heelGapMm: number;
+  kneesLift: boolean;
+}
+
+/** Thighs along the seat, feet on the floor if they reach it: shins forward when the seat is low, hanging when high. */
+function legsFor(f: Figure, placement: BodyPlacement, shoeMm: number): Legs {
+  const hipAxis: Vec3 = [0, HIP_HEIGHT_MM, HIP_FORWARD_MM];
+  const shinMm = restKnee(f)[1] - restAnkle(f)[1];
+  const footMm = f.MH + shoeMm;
+  const kneeHeight = (thighRad: number): number =>
+    toRoom(placement, turnAboutX(restKnee(f), hipAxis, thighRad))[1];
+  const upright = placement.tiltRad;
+  const cosine = (kneeHeight(0) - footMm) / shinMm;
+  if (cosine >= 1) {
+    const gap = kneeHeight(0) - footMm - shinMm;
+    const toes = Math.min(TOES_DOWN_RAD, Math.asin(clamp(gap / (0.72 * f.FL), 0, 1)));
+    return { thighRad: 0, shinRad: upright, footRad: upright + toes, heelGapMm: gap, kneesLift: false };
+  }
+  const shin = Math.acos(clamp(cosine, -1, 1));
+  if (shin <= SHIN_FURTHEST_RAD) {
+    return { thighRad: 0, shinRad: upright - shin, footRad: upright, heelGapMm: 0, kneesLift: false };
+  }
+  let low = 0;
+  let high = Math.PI / 3;
+  for (let i = 0; i < 24; i++) {
+    const middle = (low + high) / 2;
+    if (kneeHeight(-middle) < shinMm * Math.cos(SHIN_FURTHEST_RAD) + footMm) low = middle;
+    else high = middle;
+  }
+  return {
+    thighRad: -(low + high) / 2,
+    shinRad: upright - SHIN_FURTHEST_RAD,
+    footRad: upright,
+    heelGapMm: 0,
+    kneesLift: true,
+  };
+}
+
+const inWords = (note: PoseNote): string => {
+  const size = `${Math.round(note.valueMm ?? 0)} mm`;
+  switch (note.kind) {
+    case 'feet-hang':
+      return `feet hang ${size}`;
+    case 'slides-forward':
+      return `sits ${size} forward of the back to free the knees; the back is not supported`;
+    case 'knees-lift':
+      return 'the seat is low: the thighs lift off it';
+    case 'forearms-on-table':
+      return 'forearms on the table';
+    case 'hands-on-lap':
+      return 'hands on the lap';
+  }
+};
+
+/**
+ * Seats a body at a place: pelvis on the pressed seat with the buttock against the back, unless the seat
+ * is deeper than the buttock-popliteal length less 50 mm; trunk with the back, head level, thighs along
+ * the seat, feet on the floor or hanging, forearms on a table in reach or hands on the lap.
+ *
+ * @param input.means - the sitter's measures (mm, weight kg); the pose keeps a reference
+ * @param input.shoeMm - height of the shoe under the heel, mm
+ * @param input.frame - the place: hip point on the unpressed seat, facing
+ * @param input.situation - depth, tilt, lean and table of the place
+ * @param input.sinkMm - how far the seat goes down under this sitter, mm
+ * @returns the pose; throws a RangeError naming the measure when one is missing
+ * @source hip centre 92 mm over the seat and 135 mm before the buttock: SAE J826 device figures and
+ * survey links; behind-knee gap 50 mm: common practice
+ */
+export function poseMannequin(input: {
+  means: Record<MeasureKey, number> | FigureMeans;
+  shoeMm: number;
+  frame: SeatPoint;
+  situation: SeatPosture;
+  sinkMm: number;
+}): MannequinPose {
+  const { means, shoeMm, frame, situation, sinkMm } = input;
+  const f = readFigure(means);
+  const notes: PoseNote[] = [];
+  const slideMm = Math.max(0, situation.effectiveDepthMm - (f.BPL - BEHIND_KNEE_MM));
+  if (slideMm > 0) notes.push({ kind: 'slides-forward', valueMm: slideMm });
+  const placement = bodyPlacement(frame, situation.seatTiltRad, sinkMm, slideMm);
+  const upright = placement.tiltRad;
+  const lean = situation.backTopMm === undefined ? 0 : clamp(situation.backLeanRad, 0, LEAN_FURTHEST_RAD);
+  const trunkRad = upright - lean;
+
+  const legs = legsFor(f, placement, shoeMm);
+  if (legs.heelGapMm > 0.5) notes.push({ kind: 'feet-hang', valueMm: legs.heelGapMm });
+  if (legs.kneesLift) notes.push({ kind: 'knees-lift' });
+
+  const up: Vec3 = [0, Math.cos(upright), Math.sin(upright)];
+  const edge =
+    situation.table && toBody(placement, tableEdge(frame, situation.table, situation.effectiveDepthMm));
+  const onTable = edge && armOnTable(f, trunkRad, { topMm: edge[1], edgeMm: edge[2] }, up);
+  notes.push({ kind: onTable ? 'forearms-on-table' : 'hands-on-lap' });
+  const arm = onTable ?? armOnLap(f, trunkRad);
+
+  const stance: Stance = {
+    trunkRad,
+    headRad: mix(trunkRad, upright, 0.9),
+    thighRad: legs.thighRad,
+    shinRad: legs.shinRad,
+    footRad: legs.footRad,
+    toesOutRad: 0.12,
+    arms: [arm, arm],
+    shoeMm,
+  };
+  const joints = bodyJoints(f, stance, placement);
+  return {
+    means,
+    stance,
+    placement,
+    joints,
+    segments: bodySegments(f, joints, placement),
+    notes,
+    words: notes.map(inWords),
+    headTopMm: joints.crown[1],
+    eyeMm: joints.eye[1],
+    heelGapMm: legs.heelGapMm,
+  };
+}
+
+/** The near edge of the table's top on the place's centreline, room frame. */
+function tableEdge(frame: SeatPoint, table: { topMm: number; overlapMm: number }, depthMm: number): Vec3 {
+  const forward = depthMm - table.overlapMm - HIP_FORWARD_MM;
+  return [
+    frame.hipMm[0] + Math.sin(frame.facingRad) * forward,
+    table.topMm,
+    frame.hipMm[2] + Math.cos(frame.facingRad) * forward,
+  ];
+}

@@ -1,0 +1,97 @@
+import type { Vec3 } from '../parts/part.ts';
+import type { Figure } from './figure.ts';
+import { along, clamp, length, sub, turnAboutX, unit } from './vector.ts';
+
+/**
+ * One arm in the body's own frame, always written as if it were the sitter's left one; the right arm
+ * is its mirror image.
+ */
+export interface ArmStance {
+  shoulder: Vec3;
+  elbow: Vec3;
+  wrist: Vec3;
+  /** Unit vector from the wrist to the fingertips. */
+  hand: Vec3;
+  /** Unit vector out of the back of the hand. */
+  handBack: Vec3;
+}
+
+/**
+ * How a body is bent, in its own frame: x to the sitter's left, y up from the pressed seat, z forward
+ * from the rearmost buttock along the seat. Angles about x in radians; positive carries z downwards.
+ */
+export interface Stance {
+  trunkRad: number;
+  headRad: number;
+  thighRad: number;
+  shinRad: number;
+  footRad: number;
+  toesOutRad: number;
+  arms: readonly [left: ArmStance, right: ArmStance];
+  shoeMm: number;
+}
+
+/** Point the trunk leans about: the hip axis over the seat and before the back. */
+export const HIP_HEIGHT_MM = 92;
+export const HIP_FORWARD_MM = 135;
+
+/** Turns a point of the trunk with its lean. */
+export const leanPoint = (p: Vec3, angleRad: number): Vec3 =>
+  turnAboutX(p, [0, HIP_HEIGHT_MM, HIP_FORWARD_MM], angleRad);
+
+/** Depth of the shoulder line before the rearmost buttock. */
+export const shoulderLineMm = (f: Figure): number => 0.42 * f.CD - 4;
+
+/** Centre of the left shoulder joint of an upright trunk. */
+export function restShoulder(f: Figure): Vec3 {
+  const d = clamp(0.275 * (f.BD - f.BA) + 0.35 * f.radius.arm, 34, 80);
+  return [f.BD / 2 - d, 0.935 * f.AH, shoulderLineMm(f)];
+}
+
+/** Centre of the left elbow of an upright trunk with the forearms level. */
+export function restElbow(f: Figure): Vec3 {
+  const e = f.radius.elbow;
+  return [f.FF / 2 - e, f.ER + 1.11 * e, shoulderLineMm(f) + 4];
+}
+
+/** Lengths of the arm's links: shoulder to elbow so that the elbow rest comes true, elbow to wrist. */
+export function armLinks(f: Figure): { upperMm: number; forearmMm: number } {
+  return {
+    upperMm: length(sub(restElbow(f), restShoulder(f))),
+    forearmMm: Math.max(120, f.FHL - f.Ha - f.radius.elbow),
+  };
+}
+
+/** Centre of the knee with the thigh along the seat. */
+export const restKnee = (f: Figure): Vec3 => [
+  0.235 * f.HB + 6,
+  0.42 * (f.KH - f.PH),
+  (f.BPL + f.BKL) / 2 - 4,
+];
+
+/** Centre of the ankle with the shin upright. */
+export const restAnkle = (f: Figure): Vec3 => [0.235 * f.HB + 6, f.MH - f.PH, (f.BPL + f.BKL) / 2 - 4];
+
+/** Upright, arms hanging, forearms level, shins upright: the posture in which the measures are defined. */
+export function measuringStance(f: Figure): Stance {
+  const shoulder = restShoulder(f);
+  const elbow = restElbow(f);
+  const wrist = along(elbow, [0, 0, 1], armLinks(f).forearmMm);
+  const arm: ArmStance = { shoulder, elbow, wrist, hand: [0, 0, 1], handBack: [0, 1, 0] };
+  return {
+    trunkRad: 0,
+    headRad: 0,
+    thighRad: 0,
+    shinRad: 0,
+    footRad: 0,
+    toesOutRad: 0,
+    arms: [arm, arm],
+    shoeMm: 0,
+  };
+}
+
+/** Mirror image across the sitter's midplane. */
+export const mirror = (p: Vec3): Vec3 => [-p[0], p[1], p[2]];
+
+/** Direction of one point from another. */
+export const direction = (from: Vec3, to: Vec3): Vec3 => unit(sub(to, from), [0, 0, 1]);
