@@ -3,6 +3,10 @@ import { MailedToken } from '../auth/entities/mailed-token.entity';
 import { RefreshToken } from '../auth/entities/refresh-token.entity';
 import { Session } from '../auth/entities/session.entity';
 import { CastMember } from '../cast/entities/cast-member.entity';
+import { CushionOrder } from '../cushion-orders/entities/cushion-order.entity';
+import { OrderEvent } from '../cushion-orders/entities/order-event.entity';
+import { OrderLink } from '../cushion-orders/entities/order-link.entity';
+import { OrderMessage } from '../cushion-orders/entities/order-message.entity';
 import { Invitation } from '../invitations/entities/invitation.entity';
 import { OutboxAttachment } from '../mail/entities/outbox-attachment.entity';
 import { OutboxMail } from '../mail/entities/outbox-mail.entity';
@@ -13,6 +17,7 @@ import { RevisionApproval } from '../sets/entities/revision-approval.entity';
 import { SetDraft } from '../sets/entities/set-draft.entity';
 import { SetNote } from '../sets/entities/set-note.entity';
 import { SetRevision } from '../sets/entities/set-revision.entity';
+import { Upholsterer } from '../upholsterers/entities/upholsterer.entity';
 import { User } from '../users/entities/user.entity';
 import { Membership } from '../workshops/entities/membership.entity';
 import { Workshop } from '../workshops/entities/workshop.entity';
@@ -22,10 +27,14 @@ export const ENTITIES = [
   AuditEntry,
   BuiltPart,
   CastMember,
+  CushionOrder,
   DesignedSet,
   Invitation,
   MailedToken,
   Membership,
+  OrderEvent,
+  OrderLink,
+  OrderMessage,
   OutboxAttachment,
   OutboxMail,
   Production,
@@ -35,6 +44,7 @@ export const ENTITIES = [
   SetDraft,
   SetNote,
   SetRevision,
+  Upholsterer,
   User,
   Workshop,
 ];

@@ -1,0 +1,65 @@
+import {
+  Column,
+  CreateDateColumn,
+  Entity,
+  Index,
+  JoinColumn,
+  ManyToOne,
+  PrimaryGeneratedColumn,
+  type Relation,
+} from 'typeorm';
+import type { OrderState } from '../order-states';
+import { CushionOrder } from './cushion-order.entity';
+import type { Side } from './order-message.entity';
+
+export const EVENT_KINDS = [
+  'created',
+  'sent',
+  'acknowledged',
+  'state',
+  'link-renewed',
+  'link-revoked',
+] as const;
+export type EventKind = (typeof EVENT_KINDS)[number];
+
+/** What happened to an order, and who says so. Only ever added to. */
+@Entity('order_events')
+@Index(['orderId', 'at'])
+export class OrderEvent {
+  @PrimaryGeneratedColumn('uuid')
+  id: string;
+
+  @Column('uuid')
+  orderId: string;
+
+  @ManyToOne(() => CushionOrder, { nullable: false, onDelete: 'CASCADE' })
+  @JoinColumn({ name: 'order_id' })
+  order?: Relation<CushionOrder>;
+
+  @Column('text')
+  kind: EventKind;
+
+  @Column('text')
+  side: Side;
+
+  @Column({ type: 'uuid', nullable: true })
+  byId: string | null;
+
+  @Column('text')
+  byName: string;
+
+  @Column({ type: 'text', nullable: true })
+  fromState: OrderState | null;
+
+  @Column({ type: 'text', nullable: true })
+  toState: OrderState | null;
+
+  @Column('text')
+  revisionLetter: string;
+
+  @Column('text')
+  note: string;
+
+  @CreateDateColumn({ type: 'timestamptz' })
+  at: Date;
+}

@@ -1,0 +1,58 @@
+/** The words of the order; sizes come from the revision. */
+export interface OrderSpec {
+  cover: string;
+  foam: string;
+  welt: string;
+  closure: string;
+  fixing: string;
+  buttons: string;
+  notes: string;
+  /** A requirement and its evidence, recorded; never a claim that it is met. */
+  flammability: string;
+}
+
+export const SPEC_KEYS = [
+  'cover',
+  'foam',
+  'welt',
+  'closure',
+  'fixing',
+  'buttons',
+  'notes',
+  'flammability',
+] as const satisfies readonly (keyof OrderSpec)[];
+
+/** What an order asks for, cited from one issued revision. */
+export interface OrderContent {
+  revisionLetter: string;
+  title: string;
+  /** YYYY-MM-DD */
+  neededBy: string | null;
+  /** null: every cushion of the revision */
+  cushionMarks: string[] | null;
+  spec: OrderSpec;
+}
+
+/** The content as the upholsterer last received it. */
+export interface SentContent extends OrderContent {
+  at: string;
+  byUserId: string;
+  byName: string;
+}
+
+export function contentOf(from: OrderContent): OrderContent {
+  const { revisionLetter, title, neededBy, cushionMarks, spec } = from;
+  return { revisionLetter, title, neededBy, cushionMarks, spec };
+}
+
+export function sameContent(a: OrderContent, b: OrderContent): boolean {
+  const plain = ({ revisionLetter, title, neededBy, cushionMarks, spec }: OrderContent) =>
+    JSON.stringify([
+      revisionLetter,
+      title,
+      neededBy,
+      cushionMarks && [...cushionMarks].sort(),
+      SPEC_KEYS.map((key) => spec[key]),
+    ]);
+  return plain(a) === plain(b);
+}
