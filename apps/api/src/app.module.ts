@@ -7,7 +7,6 @@ import { AuthModule } from './auth/auth.module';
 import { CastModule } from './cast/cast.module';
 import { CastErasureModule } from './cast/erasure/cast-erasure.module';
 import { logParameters } from './common/request-log';
-import { WebAppModule } from './common/web-app.module';
 import { settings } from './config/settings';
 import { DatabaseModule } from './database/database.module';
 import { HealthModule } from './health/health.module';
@@ -17,6 +16,7 @@ import { ProductionDuplicationModule } from './productions/duplication/productio
 import { ProductionsModule } from './productions/productions.module';
 import { RateLimitsModule } from './rate-limits/rate-limits.module';
 import { SetsModule } from './sets/sets.module';
+import { UpholsterersModule } from './upholsterers/upholsterers.module';
 import { UsersModule } from './users/users.module';
 import { WorkshopsModule } from './workshops/workshops.module';
 
@@ -40,9 +40,9 @@ import { WorkshopsModule } from './workshops/workshops.module';
     ProductionsModule,
     CastModule,
     SetsModule,
+    UpholsterersModule,
     CastErasureModule,
     ProductionDuplicationModule,
-    WebAppModule,
   ],
 })
 export class AppModule {}

@@ -18,9 +18,10 @@ export interface TestApp {
 /** The whole application on a real database that belongs to this Jest worker, emptied before each file. */
 export async function startTestApp(
   changes: Partial<Settings> = {},
+  databaseSuffix = '',
   adapt: (builder: TestingModuleBuilder) => TestingModuleBuilder = (builder) => builder,
 ): Promise<TestApp> {
-  const databaseUrl = await makeWorkerDatabase();
+  const databaseUrl = await makeWorkerDatabase(databaseSuffix);
   const config: Settings = {
     ...readSettings({ ...process.env, NODE_ENV: 'test', DATABASE_URL: databaseUrl }),
     publicUrl: 'http://settlewright.test',
@@ -37,7 +38,12 @@ export async function startTestApp(
   const app = module.createNestApplication<NestExpressApplication>({ bodyParser: false, logger: false });
   setUpHttp(app, config);
   serveOpenApi(app);
-  await app.init();
+  try {
+    await app.init();
+  } catch (fault) {
+    await app.get(DataSource).destroy();
+    throw fault;
+  }
   return { app, dataSource: app.get(DataSource), settings: config, close: () => app.close() };
 }
 

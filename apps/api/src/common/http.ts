@@ -3,12 +3,13 @@ import cookieParser from 'cookie-parser';
 import type { NestExpressApplication } from '@nestjs/platform-express';
 import helmet from 'helmet';
 import type { Settings } from '../config/settings';
+import { BODY_LIMIT, nameBodyFaults } from './body-faults';
 import { ProblemFilter } from './problem.filter';
 import { refuseOtherSites } from './same-origin';
 import { createValidationPipe } from './validation';
+import { serveWebApp } from './web-app';
 
 export const API_PREFIX = 'api';
-const BODY_LIMIT = '3mb';
 
 /** Everything that stands before and around the routes; the same for the server and for the tests. */
 export function setUpHttp(app: NestExpressApplication, config: Settings): void {
@@ -39,7 +40,9 @@ export function setUpHttp(app: NestExpressApplication, config: Settings): void {
     cookieParser(),
     refuseOtherSites,
   );
-  app.useBodyParser('json', { limit: BODY_LIMIT });
+  app.useBodyParser('json', { limit: BODY_LIMIT.bytes });
+  app.use(nameBodyFaults);
+  if (config.webDist) serveWebApp(app, config.webDist);
   app.setGlobalPrefix(API_PREFIX);
   app.useGlobalPipes(createValidationPipe());
   app.useGlobalFilters(new ProblemFilter());

@@ -9,8 +9,6 @@ import {
 import type { Response } from 'express';
 import { Problem, type ProblemBody, problemBody } from './problem';
 
-const BODY_LIMIT_WORDS = '3 MB';
-
 @Catch()
 export class ProblemFilter implements ExceptionFilter {
   private readonly logger = new Logger(ProblemFilter.name);
@@ -28,8 +26,8 @@ export class ProblemFilter implements ExceptionFilter {
   private describe(exception: unknown): ProblemBody {
     if (exception instanceof Problem) return exception.body();
     if (exception instanceof HttpException) return describeHttp(exception);
-    const parser = describeParser(exception);
-    if (parser) return parser;
+    const unreadable = describeUnreadable(exception);
+    if (unreadable) return unreadable;
     this.logger.error(exception instanceof Error ? (exception.stack ?? exception.message) : exception);
     return problemBody(500, 'internal-error', 'Something went wrong here. Nothing was changed.');
   }
@@ -61,19 +59,10 @@ function describeHttp(exception: HttpException): ProblemBody {
   );
 }
 
-/** What Express's body parser and router throw before a route is reached. */
-function describeParser(exception: unknown): ProblemBody | null {
+/** What Express throws before a route is reached, as for an unreadable address or charset. */
+function describeUnreadable(exception: unknown): ProblemBody | null {
   if (!(exception instanceof Error) || !('status' in exception)) return null;
-  const type = 'type' in exception ? exception.type : undefined;
-  if (type === 'entity.too.large') {
-    return problemBody(413, 'too-large', `More was sent than is accepted: at most ${BODY_LIMIT_WORDS}.`);
-  }
-  if (type === 'entity.parse.failed') {
-    return problemBody(400, 'malformed-json', 'The body is not valid JSON.');
-  }
-  const status = exception.status;
-  if (typeof status === 'number' && status >= 400 && status < 500) {
-    return problemBody(status, 'bad-request', 'The request cannot be read.');
-  }
-  return null;
+  const { status } = exception;
+  if (typeof status !== 'number' || status < 400 || status >= 500) return null;
+  return problemBody(status, HTTP_CODES[status] ?? 'bad-request', 'The request cannot be read.');
 }

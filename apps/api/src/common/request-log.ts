@@ -2,11 +2,11 @@ import { randomUUID } from 'node:crypto';
 import type { IncomingMessage, ServerResponse } from 'node:http';
 import type { Params } from 'nestjs-pino';
 
-const TOKEN_PATHS = /^(\/api\/link|\/api\/invitations|\/order|\/invitation|\/reset|\/confirm)\/[^/]+/;
+const TOKEN_PATHS = /^(\/api\/link|\/api\/invitations|\/order|\/invitation|\/reset|\/confirm)\/[^/]+/i;
 
 /** The path as it may stand in a log: no query (searches name people), no token of a private link. */
 export function loggedPath(url: string): string {
-  const path = url.split('?', 1)[0] ?? '';
+  const path = (url.split('?', 1)[0] ?? '').replace(/\/{2,}/g, '/');
   return path.replace(TOKEN_PATHS, '$1/[token]');
 }
 
