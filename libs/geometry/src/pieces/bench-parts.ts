@@ -1,0 +1,136 @@
+import { boardRun } from '../parts/boards.ts';
+import { partList, type PartList } from '../parts/part-list.ts';
+import type { Part } from '../parts/part.ts';
+import { positionsAlong } from '../parts/spacing.ts';
+import type { PieceOf } from '../room/document.ts';
+import { benchBaseParts } from './bench-base.ts';
+import { benchLayout, PANEL_MM, type BenchLayout } from './bench-layout.ts';
+
+const POST_MM = 30;
+const POST_PITCH_MM = 800;
+const ARM_RAIL_MM = 35;
+
+/**
+ * Parts of a bench: base, deck, boards of the back, cushions and ends.
+ *
+ * @param bench - the bench
+ * @returns its parts, placed in the room
+ */
+export function benchParts(bench: PieceOf<'bench'>): Part[] {
+  const list = partList(bench);
+  const layout = benchLayout(bench);
+  benchBaseParts(list, bench, layout);
+  if (layout.hasBack) back(list, bench, layout);
+  cushions(list, bench, layout);
+  end(list, bench, layout, 'left');
+  end(list, bench, layout, 'right');
+  return list.parts;
+}
+
+function back(list: PartList, bench: PieceOf<'bench'>, layout: BenchLayout): void {
+  const { leanRad, backTopMm, rearPanelMm, backBoardMm, innerLeftMm, innerRightMm } = layout;
+  const [sin, cos] = [Math.sin(leanRad), Math.cos(leanRad)];
+  const tilt = Math.tan(layout.tiltRad);
+  const middle = (innerLeftMm + innerRightMm) / 2;
+  const inner = innerRightMm - innerLeftMm;
+  const panelBottom = bench.base === 'box' ? 0 : Math.max(0, layout.deckUndersideAt(rearPanelMm));
+  list.box('back-frame', 'ply', {
+    sizeMm: [inner, backTopMm - panelBottom, rearPanelMm],
+    centreMm: [middle, (backTopMm + panelBottom) / 2, rearPanelMm / 2],
+  });
+
+  // Distance down a line of the lean, from a point at the top, to the deck.
+  const downToDeck = (topY: number, topZ: number) => (topY - layout.deckTopAt(topZ)) / (cos + sin * tilt);
+  const faceTopZ = bench.backThicknessMm;
+  const rearTopY = backTopMm - backBoardMm * sin;
+  const rearTopZ = faceTopZ - backBoardMm * cos;
+  const boardLength = Math.min(downToDeck(backTopMm, faceTopZ), downToDeck(rearTopY, rearTopZ));
+  for (const board of boardRun(inner, bench.boards)) {
+    list.box('back-board', 'oak', {
+      sizeMm: [board.widthMm, boardLength, backBoardMm],
+      centreMm: [
+        middle + board.centreMm,
+        backTopMm - (boardLength / 2) * cos - (backBoardMm / 2) * sin,
+        faceTopZ + (boardLength / 2) * sin - (backBoardMm / 2) * cos,
+      ],
+      pitchRad: -leanRad,
+      grain: 'y',
+    });
+  }
+
+  const postTopZ = faceTopZ - backBoardMm / cos;
+  const reach = downToDeck(backTopMm, postTopZ);
+  const outlineMm = [
+    [rearPanelMm, layout.deckTopAt(rearPanelMm)],
+    [postTopZ + reach * sin, backTopMm - reach * cos],
+    [postTopZ, backTopMm],
+    [rearPanelMm, backTopMm],
+  ] as const;
+  if (postTopZ - rearPanelMm < 1) return;
+  for (const x of positionsAlong(innerLeftMm + POST_MM / 2, innerRightMm - POST_MM / 2, POST_PITCH_MM)) {
+    list.crossPanel('back-frame', 'ply', { xMm: x, thicknessMm: POST_MM, outlineMm });
+  }
+}
+
+function cushions(list: PartList, bench: PieceOf<'bench'>, layout: BenchLayout): void {
+  const { tiltRad, leanRad, cushionLeftMm, cushionRightMm, faceZMm } = layout;
+  const run = cushionRightMm - cushionLeftMm;
+  const count = Math.max(1, Math.ceil(run / bench.upholstery.longestCushionMm - 1e-9));
+  const width = run / count;
+  const seat = bench.seatCushion.thicknessMm;
+  const slope = bench.seatDepthMm / Math.cos(tiltRad);
+  const pad = bench.backCushion.thicknessMm;
+  const rise = (layout.backTopMm - layout.seatTopRearMm) / Math.cos(leanRad);
+  for (let i = 0; i < count; i += 1) {
+    const x = cushionLeftMm + (i + 0.5) * width;
+    list.box('seat-cushion', 'cloth', {
+      sizeMm: [width, seat, slope],
+      centreMm: [
+        x,
+        layout.seatTopFrontMm - (slope / 2) * Math.sin(tiltRad) - (seat / 2) * Math.cos(tiltRad),
+        layout.frontZMm - (slope / 2) * Math.cos(tiltRad) + (seat / 2) * Math.sin(tiltRad),
+      ],
+      pitchRad: -tiltRad,
+    });
+    if (!layout.hasBack) continue;
+    list.box('back-cushion', 'cloth', {
+      sizeMm: [width, rise, pad],
+      centreMm: [
+        x,
+        layout.seatTopRearMm + (rise / 2) * Math.cos(leanRad) - (pad / 2) * Math.sin(leanRad),
+        faceZMm - (rise / 2) * Math.sin(leanRad) - (pad / 2) * Math.cos(leanRad),
+      ],
+      pitchRad: -leanRad,
+    });
+  }
+}
+
+function end(list: PartList, bench: PieceOf<'bench'>, layout: BenchLayout, side: 'left' | 'right'): void {
+  const { kind, thicknessMm, heightMm } = bench.ends[side];
+  if (kind === 'open') return;
+  const sign = side === 'left' ? -1 : 1;
+  const x = sign * (bench.lengthMm / 2 - thicknessMm / 2);
+  const front = layout.deckFrontZMm;
+  const top = layout.pressedTopMm + heightMm;
+  const armed = kind === 'arm' && heightMm > 2 * ARM_RAIL_MM;
+  const panelTop = armed ? layout.pressedTopMm : top;
+  list.box('end-wall', 'oak', {
+    sizeMm: [thicknessMm, panelTop, front],
+    centreMm: [x, panelTop / 2, front / 2],
+    grain: 'y',
+  });
+  if (!armed) return;
+  list.box('arm', 'oak', {
+    sizeMm: [thicknessMm, ARM_RAIL_MM, front],
+    centreMm: [x, top - ARM_RAIL_MM / 2, front / 2],
+    grain: 'z',
+  });
+  const post = heightMm - ARM_RAIL_MM;
+  for (const z of [PANEL_MM, front - 3 * PANEL_MM]) {
+    list.box('arm', 'oak', {
+      sizeMm: [thicknessMm, post, 2 * PANEL_MM],
+      centreMm: [x, panelTop + post / 2, z],
+      grain: 'y',
+    });
+  }
+}

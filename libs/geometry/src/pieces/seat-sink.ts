@@ -1,0 +1,40 @@
+import { REFERENCE_SITTER_KG, seatSinkMm } from '@settlewright/anthropometry';
+import type { PieceOf } from '../room/document.ts';
+
+/** A piece that people sit on. */
+export type SeatPiece = PieceOf<'bench'> | PieceOf<'loose-seat'>;
+
+/**
+ * How far the reference sitter of 77 kg presses the seat cushion down.
+ *
+ * @param piece - bench or loose seat
+ * @returns millimetres; 0 without a cushion
+ * @source foam estimator of the anthropometry library
+ */
+export function referenceSinkMm(piece: SeatPiece): number {
+  const { thicknessMm, foam } = piece.seatCushion;
+  if (thicknessMm === 0) return 0;
+  const situation = { thicknessMm, ifd25N: foam.ifd25N, supportFactor: foam.supportFactor };
+  return seatSinkMm(situation, REFERENCE_SITTER_KG).sinkMm;
+}
+
+/**
+ * Seat height at the front edge with the cushion pressed by the reference sitter.
+ *
+ * @param piece - bench or loose seat
+ * @returns millimetres above the floor
+ */
+export function pressedSeatHeightMm(piece: SeatPiece): number {
+  return piece.deckHeightMm + piece.seatCushion.thicknessMm - referenceSinkMm(piece);
+}
+
+/**
+ * Moves the deck so that the pressed seat comes to a height.
+ *
+ * @param piece - bench or loose seat
+ * @param heightMm - wanted pressed seat height above the floor
+ * @returns the piece with another deck height, not checked against limits
+ */
+export function withPressedSeatHeight<P extends SeatPiece>(piece: P, heightMm: number): P {
+  return { ...piece, deckHeightMm: heightMm - piece.seatCushion.thicknessMm + referenceSinkMm(piece) };
+}

@@ -1,0 +1,130 @@
+import { partList, type PartList } from '../parts/part-list.ts';
+import type { MaterialKey, Part, PartRole } from '../parts/part.ts';
+import type { PieceOf } from '../room/document.ts';
+
+type Table = PieceOf<'table'>;
+
+const EDGE_MM = 18;
+const APRON_MM = 18;
+
+/**
+ * Parts of a table: top, edge lip, apron and base.
+ *
+ * @param table - the table
+ * @returns its parts, placed in the room
+ */
+export function tableParts(table: Table): Part[] {
+  const list = partList(table);
+  const underside = table.heightMm - table.topThicknessMm;
+  list.box('top', 'walnut', {
+    sizeMm: [table.lengthMm, table.topThicknessMm, table.widthMm],
+    centreMm: [0, table.heightMm - table.topThicknessMm / 2, 0],
+    grain: 'x',
+  });
+  const lip = table.edgeLipMm > 0 ? EDGE_MM : 0;
+  if (lip > 0)
+    frame(list, 'edge-lip', 'walnut', table, { inset: 0, board: lip, drop: table.edgeLipMm, underside });
+  const inset = Math.max(table.apron.insetMm, lip);
+  const apron = hasApron(table, inset);
+  if (apron) {
+    frame(list, 'apron', 'oak', table, { inset, board: APRON_MM, drop: table.apron.heightMm, underside });
+  }
+  base(list, table, apron ? inset + APRON_MM : lip, underside);
+  return list.parts;
+}
+
+function hasApron(table: Table, insetMm: number): boolean {
+  const narrow = Math.min(table.lengthMm, table.widthMm);
+  return table.apron.heightMm > 0 && narrow > 2 * (insetMm + APRON_MM) + 10;
+}
+
+/** Four boards under the top, the long ones running through. */
+function frame(
+  list: PartList,
+  role: PartRole,
+  material: MaterialKey,
+  table: Table,
+  { inset, board, drop, underside }: { inset: number; board: number; drop: number; underside: number },
+): void {
+  const height = Math.min(drop, underside);
+  const y = underside - height / 2;
+  const long = table.lengthMm - 2 * inset;
+  const short = table.widthMm - 2 * inset - 2 * board;
+  for (const sign of [-1, 1]) {
+    list.box(role, material, {
+      sizeMm: [long, height, board],
+      centreMm: [0, y, sign * (table.widthMm / 2 - inset - board / 2)],
+      grain: 'x',
+    });
+    list.box(role, material, {
+      sizeMm: [board, height, short],
+      centreMm: [sign * (table.lengthMm / 2 - inset - board / 2), y, 0],
+      grain: 'z',
+    });
+  }
+}
+
+/** Legs, trestles or columns; legs stand inside apron and lip. */
+function base(list: PartList, table: Table, clearMm: number, underside: number): void {
+  const { base: kind } = table;
+  const halfLength = table.lengthMm / 2;
+  const halfWidth = table.widthMm / 2;
+  if (kind.kind === 'legs') {
+    const inset = Math.max(kind.insetMm, clearMm);
+    const x = Math.max(halfLength - inset - kind.sizeMm / 2, kind.sizeMm / 2 + 1);
+    const z = Math.max(halfWidth - inset - kind.sizeMm / 2, kind.sizeMm / 2 + 1);
+    for (const [sx, sz] of [
+      [-1, -1],
+      [1, -1],
+      [-1, 1],
+      [1, 1],
+    ] as const) {
+      list.box('leg', 'oak', {
+        sizeMm: [kind.sizeMm, underside, kind.sizeMm],
+        centreMm: [sx * x, underside / 2, sz * z],
+        grain: 'y',
+      });
+    }
+    return;
+  }
+  if (kind.kind === 'trestles') {
+    const inset = Math.max(kind.insetMm, clearMm);
+    const x = Math.max(halfLength - inset - kind.thicknessMm / 2, kind.thicknessMm / 2 + 1);
+    const depth = Math.max(2 * (halfWidth - Math.max(clearMm, table.widthMm * 0.1)), 10);
+    for (const sign of [-1, 1]) {
+      list.box('leg', 'oak', {
+        sizeMm: [kind.thicknessMm, underside, depth],
+        centreMm: [sign * x, underside / 2, 0],
+        grain: 'y',
+      });
+    }
+    return;
+  }
+  columns(list, table, kind, underside);
+}
+
+function columns(
+  list: PartList,
+  table: Table,
+  kind: Extract<Table['base'], { kind: 'columns' }>,
+  underside: number,
+): void {
+  const { footLengthMm, diameterMm } = kind;
+  const footHeight = Math.min(kind.footHeightMm, underside / 2);
+  const footWidth = Math.min(diameterMm * 0.8, footLengthMm / 2);
+  const xs = kind.count === 1 ? [0] : [-table.lengthMm / 4, table.lengthMm / 4];
+  for (const x of xs) {
+    list.cylinder('column', 'walnut', {
+      xMm: x,
+      zMm: 0,
+      radiusMm: diameterMm / 2,
+      bottomMm: footHeight,
+      topMm: underside,
+    });
+    list.box('foot', 'walnut', {
+      sizeMm: [footWidth, footHeight, footLengthMm],
+      centreMm: [x, footHeight / 2, 0],
+      grain: 'z',
+    });
+  }
+}

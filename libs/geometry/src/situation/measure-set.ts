@@ -1,0 +1,70 @@
+import type { PlaceSituation, SetSituation } from '@settlewright/anthropometry';
+import { benchLayout } from '../pieces/bench-layout.ts';
+import { pressedSeatHeightMm } from '../pieces/seat-sink.ts';
+import type { SetDocument } from '../room/document.ts';
+import { radians } from '../units/angle.ts';
+import { benchSituations, cornerSituations, facingSituations } from './benches.ts';
+import { overheadOf, sillsBeside, wallsBeside } from './beside.ts';
+import { lapTable } from './lap-table.ts';
+import { survey, type Survey, type SurveyedPlace } from './survey.ts';
+import { tableSituations } from './tables.ts';
+import { waySituations } from './ways.ts';
+
+/**
+ * How far from the seat's centreline a sill's near edge may lie and still be beside the place:
+ * half of the widest forearms of SILL-04 (667 mm) and 75 mm.
+ */
+export const SILL_REACH_MM = 667 / 2 + 75;
+
+/**
+ * Measures what a set offers at every place, bench, table and way. Checks read nothing else of the set.
+ *
+ * @param document - the set
+ * @param settings - `sillReachMm` widens or narrows which sills count as beside a place
+ * @returns lengths in millimetres, angles in radians
+ */
+export function measureSet(document: SetDocument, settings: { sillReachMm?: number } = {}): SetSituation {
+  const found = survey(document);
+  const reach = settings.sillReachMm ?? SILL_REACH_MM;
+  const places = found.places.map((place) => placeSituation(found, place, reach));
+  return {
+    places,
+    benches: benchSituations(found),
+    tables: tableSituations(found, places),
+    facing: facingSituations(found),
+    corners: cornerSituations(found),
+    ways: waySituations(found, places),
+  };
+}
+
+function placeSituation(found: Survey, place: SurveyedPlace, sillReachMm: number): PlaceSituation {
+  const { frame, piece } = place;
+  const { thicknessMm, foam } = piece.seatCushion;
+  return {
+    placeId: frame.placeId,
+    pieceId: piece.id,
+    mark: piece.mark,
+    place: frame.place,
+    seatTopFrontMm: frame.frontMm[1],
+    seatTopHipMm: frame.hipMm[1],
+    deckHeightMm: piece.deckHeightMm,
+    foam:
+      thicknessMm > 0 ? { thicknessMm, ifd25N: foam.ifd25N, supportFactor: foam.supportFactor } : undefined,
+    effectiveDepthMm: place.effectiveDepthMm,
+    widthMm: frame.widthMm,
+    heelRoomMm: heelRoom(piece),
+    seatTiltRad: piece.kind === 'bench' ? radians(piece.seatTiltDeg) : 0,
+    backLeanRad: radians(piece.backLeanDeg),
+    backTopMm: piece.backHeightMm > 0 ? pressedSeatHeightMm(piece) + piece.backHeightMm : undefined,
+    wallMm: wallsBeside(found, place),
+    sills: sillsBeside(found, place, sillReachMm),
+    table: lapTable(found, place),
+    overhead: overheadOf(found, place),
+  };
+}
+
+function heelRoom(piece: SurveyedPlace['piece']): number | undefined {
+  if (piece.kind !== 'bench' || piece.base === 'open') return undefined;
+  const layout = benchLayout(piece);
+  return layout.frontZMm - layout.kickFrontZMm;
+}

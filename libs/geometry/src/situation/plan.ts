@@ -1,0 +1,156 @@
+import type { Part } from '../parts/part.ts';
+
+/** A point seen from above: two level axes, millimetres. */
+export type PlanPoint = readonly [number, number];
+
+/** A convex outline seen from above. */
+export type PlanOutline = readonly PlanPoint[];
+
+/** A part as clearances see it: an upright prism around it. */
+export interface PlanSolid {
+  pieceId: string;
+  role: Part['role'];
+  bottomMm: number;
+  topMm: number;
+  outline: PlanOutline;
+}
+
+const CIRCLE_SIDES = 32;
+
+/**
+ * The upright prism around a part.
+ *
+ * @param part - a placed part, turned about y and x only
+ * @returns its outline in the room's x and z, and its height range
+ */
+export function planSolid(part: Part): PlanSolid {
+  const [px, py, pz] = part.positionMm;
+  const [pitch, yaw] = part.rotationRad;
+  const [c, s] = [Math.cos(yaw), Math.sin(yaw)];
+  const place = (x: number, z: number): PlanPoint => [px + x * c + z * s, pz - x * s + z * c];
+  const rectangle = (x0: number, x1: number, z0: number, z1: number): PlanOutline => [
+    place(x0, z0),
+    place(x1, z0),
+    place(x1, z1),
+    place(x0, z1),
+  ];
+  const { solid } = part;
+  const named = { pieceId: part.pieceId, role: part.role };
+  if (solid.shape === 'cylinder') {
+    const outline = Array.from({ length: CIRCLE_SIDES }, (_, i) => {
+      const angle = (2 * Math.PI * i) / CIRCLE_SIDES;
+      return place(solid.radiusMm * Math.cos(angle), solid.radiusMm * Math.sin(angle));
+    });
+    return { ...named, bottomMm: py - solid.heightMm / 2, topMm: py + solid.heightMm / 2, outline };
+  }
+  if (solid.shape === 'prism') {
+    const xs = solid.outlineMm.map(([x]) => x);
+    const ys = solid.outlineMm.map(([, y]) => y);
+    const outline = rectangle(Math.min(...xs), Math.max(...xs), -solid.depthMm / 2, solid.depthMm / 2);
+    return { ...named, bottomMm: py + Math.min(...ys), topMm: py + Math.max(...ys), outline };
+  }
+  const [w, h, d] = solid.sizeMm;
+  const [cp, sp] = [Math.abs(Math.cos(pitch)), Math.abs(Math.sin(pitch))];
+  const halfZ = (d * cp + h * sp) / 2;
+  const halfY = (h * cp + d * sp) / 2;
+  return {
+    ...named,
+    bottomMm: py - halfY,
+    topMm: py + halfY,
+    outline: rectangle(-w / 2, w / 2, -halfZ, halfZ),
+  };
+}
+
+/** A level frame: an origin and the direction its second axis looks in. */
+export interface PlanFrame {
+  xMm: number;
+  zMm: number;
+  facingRad: number;
+}
+
+/**
+ * Takes an outline from the room into a frame: first axis to the left of whoever looks along the second.
+ *
+ * @param outline - in the room's x and z
+ * @param frame - origin and facing
+ * @returns the outline in the frame's two axes
+ */
+export function inFrame(outline: PlanOutline, frame: PlanFrame): PlanOutline {
+  const [c, s] = [Math.cos(frame.facingRad), Math.sin(frame.facingRad)];
+  return outline.map(([x, z]) => {
+    const [dx, dz] = [x - frame.xMm, z - frame.zMm];
+    return [dx * c - dz * s, dx * s + dz * c] as const;
+  });
+}
+
+/** A window in a frame; an open side is infinite. */
+export interface PlanWindow {
+  left?: readonly [number, number];
+  ahead?: readonly [number, number];
+}
+
+/**
+ * The part of a convex outline inside a window.
+ *
+ * @param outline - convex, in the frame of the window
+ * @param window - limits along the first axis (`left`) and the second (`ahead`)
+ * @returns the outline cut to the window; empty when they do not meet
+ */
+export function clipped(outline: PlanOutline, window: PlanWindow): PlanOutline {
+  let rest = outline;
+  for (const [axis, limits] of [
+    [0, window.left],
+    [1, window.ahead],
+  ] as const) {
+    if (limits === undefined) continue;
+    rest = half(rest, axis, limits[0], 1);
+    rest = half(rest, axis, limits[1], -1);
+  }
+  return rest;
+}
+
+/** Keeps what lies on the side of `limit` that `sign` points to. */
+function half(outline: PlanOutline, axis: 0 | 1, limit: number, sign: 1 | -1): PlanOutline {
+  const kept: PlanPoint[] = [];
+  outline.forEach((point, i) => {
+    const next = outline[(i + 1) % outline.length] ?? point;
+    const here = sign * (point[axis] - limit);
+    const there = sign * (next[axis] - limit);
+    if (here >= 0) kept.push(point);
+    if (here >= 0 === there >= 0 || here === there) return;
+    const t = here / (here - there);
+    kept.push([point[0] + (next[0] - point[0]) * t, point[1] + (next[1] - point[1]) * t]);
+  });
+  return kept;
+}
+
+/**
+ * Area of an outline.
+ *
+ * @param outline - simple polygon
+ * @returns square millimetres, never negative
+ */
+export function area(outline: PlanOutline): number {
+  let twice = 0;
+  outline.forEach(([x, z], i) => {
+    const [nx, nz] = outline[(i + 1) % outline.length] ?? [x, z];
+    twice += x * nz - nx * z;
+  });
+  return Math.abs(twice) / 2;
+}
+
+/**
+ * Lowest and highest value of an outline along an axis.
+ *
+ * @param outline - at least one point
+ * @param axis - 0 for the first axis, 1 for the second
+ * @returns [lowest, highest]
+ */
+export function extent(outline: PlanOutline, axis: 0 | 1): [number, number] {
+  let [low, high] = [Infinity, -Infinity];
+  for (const point of outline) {
+    low = Math.min(low, point[axis]);
+    high = Math.max(high, point[axis]);
+  }
+  return [low, high];
+}

@@ -1,0 +1,124 @@
+import { benchLayout } from '../pieces/bench-layout.ts';
+import { derivePieceParts } from '../pieces/kinds.ts';
+import { placeFrames, type PlaceFrame } from '../pieces/place-frames.ts';
+import type { Piece, PieceOf, SetDocument } from '../room/document.ts';
+import { extent, inFrame, planSolid, type PlanFrame, type PlanOutline, type PlanSolid } from './plan.ts';
+
+/** A piece with its parts as clearances see them. */
+export interface SurveyedPiece {
+  piece: Piece;
+  solids: PlanSolid[];
+  /** Circle around the outlines of all parts. */
+  centre: readonly [number, number];
+  radiusMm: number;
+}
+
+/** A place as clearances see it: origin at the seat front, second axis ahead of the sitter. */
+export interface SurveyedPlace {
+  frame: PlaceFrame;
+  piece: PieceOf<'bench'> | PieceOf<'loose-seat'>;
+  plan: PlanFrame;
+  effectiveDepthMm: number;
+  /** Seat front to the hip point, backwards. */
+  hipBehindFrontMm: number;
+}
+
+/** Everything of a set that measuring reads, derived once. */
+export interface Survey {
+  document: SetDocument;
+  pieces: SurveyedPiece[];
+  places: SurveyedPlace[];
+}
+
+/**
+ * Derives the parts and places of a set once, for all measurements.
+ *
+ * @param document - the set
+ * @returns pieces with their solids, and places with their frames
+ */
+export function survey(document: SetDocument): Survey {
+  const pieces = document.pieces.map((piece) => {
+    const solids = derivePieceParts(piece, document).map(planSolid);
+    return { piece, solids, ...circle(solids, piece) };
+  });
+  const places = document.pieces.flatMap((piece) =>
+    piece.kind === 'bench' || piece.kind === 'loose-seat'
+      ? placeFrames(piece, document).map((frame) => surveyedPlace(frame, piece))
+      : [],
+  );
+  return { document, pieces, places };
+}
+
+/**
+ * Solids near a frame, in that frame.
+ *
+ * @param found - the survey
+ * @param plan - the frame
+ * @param reachMm - pieces whose parts all lie further from the frame's origin are left out
+ * @param wanted - which pieces to look at
+ * @returns solids with their outline in the frame
+ */
+export function solidsNear(
+  found: Survey,
+  plan: PlanFrame,
+  reachMm: number,
+  wanted: (piece: Piece) => boolean,
+): PlanSolid[] {
+  const near: PlanSolid[] = [];
+  for (const { piece, solids, centre, radiusMm } of found.pieces) {
+    if (!wanted(piece)) continue;
+    if (Math.hypot(centre[0] - plan.xMm, centre[1] - plan.zMm) > reachMm + radiusMm) continue;
+    for (const solid of solids) near.push({ ...solid, outline: inFrame(solid.outline, plan) });
+  }
+  return near;
+}
+
+/**
+ * The level frame of a piece: origin where the piece stands, looking the way the piece faces.
+ *
+ * @param piece - any piece
+ * @returns its frame
+ */
+export function planOfPiece(piece: Piece): PlanFrame {
+  return { xMm: piece.at.xMm, zMm: piece.at.zMm, facingRad: (piece.at.turnDeg * Math.PI) / 180 };
+}
+
+/**
+ * Outline of a table's top, or of any rectangle of a piece, in the room.
+ *
+ * @param piece - the piece
+ * @param xs - limits along its own x axis
+ * @param zs - limits along its own z axis
+ * @returns the rectangle in the room's x and z
+ */
+export function rectangleOf(
+  piece: Piece,
+  xs: readonly [number, number],
+  zs: readonly [number, number],
+): PlanOutline {
+  const { xMm, zMm, facingRad } = planOfPiece(piece);
+  const [c, s] = [Math.cos(facingRad), Math.sin(facingRad)];
+  return [
+    [xs[0], zs[0]],
+    [xs[1], zs[0]],
+    [xs[1], zs[1]],
+    [xs[0], zs[1]],
+  ].map(([x = 0, z = 0]) => [xMm + x * c + z * s, zMm - x * s + z * c] as const);
+}
+
+function surveyedPlace(frame: PlaceFrame, piece: SurveyedPlace['piece']): SurveyedPlace {
+  const [xMm, , zMm] = frame.frontMm;
+  const plan = { xMm, zMm, facingRad: frame.facingRad };
+  const hipBehindFrontMm = Math.hypot(frame.hipMm[0] - xMm, frame.hipMm[2] - zMm);
+  const effectiveDepthMm =
+    piece.kind === 'bench' ? benchLayout(piece).frontZMm - benchLayout(piece).faceZMm : piece.seatDepthMm;
+  return { frame, piece, plan, effectiveDepthMm, hipBehindFrontMm };
+}
+
+function circle(solids: PlanSolid[], piece: Piece): { centre: readonly [number, number]; radiusMm: number } {
+  if (solids.length === 0) return { centre: [piece.at.xMm, piece.at.zMm], radiusMm: 0 };
+  const all = solids.flatMap((solid) => solid.outline);
+  const [x0, x1] = extent(all, 0);
+  const [z0, z1] = extent(all, 1);
+  return { centre: [(x0 + x1) / 2, (z0 + z1) / 2], radiusMm: Math.hypot(x1 - x0, z1 - z0) / 2 };
+}

@@ -1,0 +1,57 @@
+import type { LengthStyle } from './length-style.ts';
+import { fail, ok, type Result } from './result.ts';
+
+/** Kilograms in one avoirdupois pound, exactly. */
+export const KG_PER_POUND = 0.45359237;
+
+/** Heaviest mass that is read, in kilograms. */
+export const HEAVIEST_MASS_KG = 100_000;
+
+/** Why a typed mass was not taken. */
+export interface MassError {
+  code: 'empty' | 'unreadable' | 'negative' | 'too-large';
+  read: string;
+  accepted: string;
+  message: string;
+}
+
+const ACCEPTED = 'a mass such as 170 lb, 77 kg or 77.5';
+const MASS = /^(\d+(?:[.,]\d*)?|[.,]\d+) ?(kg|kgs|kilograms?|kilos?|lb|lbs|pounds?)?$/;
+
+/**
+ * Reads a mass.
+ *
+ * @param text - as typed: 170 lb, 77 kg, 77.5
+ * @param bareUnit - unit of a bare number: the display unit
+ * @returns kilograms, or an error with what was read and what is accepted
+ */
+export function parseMass(text: string, bareUnit: 'lb' | 'kg'): Result<number, MassError> {
+  const plain = text.trim().toLowerCase().replace(/[−–]/g, '-').replace(/\s+/g, ' ');
+  const error = (code: MassError['code'], message: string) =>
+    fail<MassError>({ code, read: text, accepted: ACCEPTED, message });
+  if (plain === '') return error('empty', `Nothing was typed. Type ${ACCEPTED}.`);
+  if (plain.startsWith('-')) return error('negative', `“${text.trim()}” is below zero. Type ${ACCEPTED}.`);
+  const parts = MASS.exec(plain);
+  if (parts === null) return error('unreadable', `“${text.trim()}” is not a mass. Type ${ACCEPTED}.`);
+  const pounds = (parts[2] ?? bareUnit).startsWith('lb') || (parts[2] ?? '').startsWith('pound');
+  const kg = Number((parts[1] ?? '').replace(',', '.')) * (pounds ? KG_PER_POUND : 1);
+  if (kg > HEAVIEST_MASS_KG) {
+    return error('too-large', `“${text.trim()}” is more than 100,000 kg, the heaviest mass read.`);
+  }
+  return ok(kg);
+}
+
+/**
+ * Writes a mass for show: whole pounds with inches, kilograms with millimetres (one decimal below ten).
+ *
+ * @param kg - the mass, finite
+ * @param style - the display style of lengths; mass follows its system
+ * @returns text such as "170 lb" or "77 kg" with a space that does not break
+ */
+export function formatMass(kg: number, style: LengthStyle): string {
+  const metric = style.system === 'millimetres';
+  const value = metric ? kg : kg / KG_PER_POUND;
+  const decimals = Math.abs(value) < 10 ? 1 : 0;
+  const shown = Number(Math.abs(value).toFixed(decimals));
+  return `${kg < 0 && shown > 0 ? '−' : ''}${shown}\u202f${metric ? 'kg' : 'lb'}`;
+}

@@ -1,0 +1,74 @@
+import { lengthStep, MM_PER_INCH, type LengthStyle } from './length-style.ts';
+
+const UNITS = [
+  'zero',
+  'one',
+  'two',
+  'three',
+  'four',
+  'five',
+  'six',
+  'seven',
+  'eight',
+  'nine',
+  'ten',
+  'eleven',
+  'twelve',
+  'thirteen',
+  'fourteen',
+  'fifteen',
+  'sixteen',
+  'seventeen',
+  'eighteen',
+  'nineteen',
+];
+const TENS = ['', '', 'twenty', 'thirty', 'forty', 'fifty', 'sixty', 'seventy', 'eighty', 'ninety'];
+const PARTS: Record<number, [string, string]> = {
+  2: ['half', 'halves'],
+  4: ['quarter', 'quarters'],
+  8: ['eighth', 'eighths'],
+  16: ['sixteenth', 'sixteenths'],
+};
+
+/**
+ * Says a length in words, for a screen reader: "seventeen and one half inches".
+ *
+ * @param mm - the length, finite
+ * @param style - the display style; rounding is the same as in `formatLength`
+ * @returns words, with "minus" in front of a negative length
+ */
+export function spokenLength(mm: number, style: LengthStyle): string {
+  const steps = Math.round(Math.abs(mm) / lengthStep(style));
+  const sign = mm < 0 && steps > 0 ? 'minus ' : '';
+  if (style.system === 'millimetres') return `${sign}${steps} ${steps === 1 ? 'millimetre' : 'millimetres'}`;
+  if (style.system === 'decimal-inches') {
+    const inches = Number(((steps * lengthStep(style)) / MM_PER_INCH).toFixed(2));
+    return `${sign}${inches} ${inches === 1 ? 'inch' : 'inches'}`;
+  }
+  const perFoot = 12 * style.roundTo;
+  const feet = style.feet === true ? Math.floor(steps / perFoot) : 0;
+  const rest = steps - feet * perFoot;
+  if (feet === 0) return `${sign}${spokenInches(rest, style.roundTo)}`;
+  const feetWords = `${numberWords(feet)} ${feet === 1 ? 'foot' : 'feet'}`;
+  return `${sign}${feetWords}${rest === 0 ? '' : ` ${spokenInches(rest, style.roundTo)}`}`;
+}
+
+function spokenInches(parts: number, per: number): string {
+  const whole = Math.floor(parts / per);
+  let n = parts - whole * per;
+  let d = per;
+  while (n !== 0 && n % 2 === 0) {
+    n /= 2;
+    d /= 2;
+  }
+  if (n === 0) return `${numberWords(whole)} ${whole === 1 ? 'inch' : 'inches'}`;
+  const fraction = `${numberWords(n)} ${PARTS[d]?.[n === 1 ? 0 : 1] ?? ''}`;
+  return whole === 0 ? `${fraction} of an inch` : `${numberWords(whole)} and ${fraction} inches`;
+}
+
+function numberWords(n: number): string {
+  if (n < 20) return UNITS[n] ?? String(n);
+  if (n >= 100) return String(n);
+  const rest = n % 10;
+  return `${TENS[Math.floor(n / 10)] ?? ''}${rest === 0 ? '' : `-${UNITS[rest] ?? ''}`}`;
+}
