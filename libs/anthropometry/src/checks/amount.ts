@@ -24,19 +24,21 @@ export const ofBody = (body: Body, key: MeasureKey, factor = 1): Amount => ({
 
 /** `a` + factor · `b`. */
 export function plus(a: Amount, b: Amount, factor = 1): Amount {
-  if (b.terms.length === 0) return { constant: a.constant + factor * b.constant, terms: a.terms };
-  const terms = a.terms.map(({ body, weights }) => ({ body, weights: { ...weights } }));
+  const constant = a.constant + factor * b.constant;
+  if (b.terms.length === 0) return { constant, terms: a.terms };
+  if (a.terms.length === 0 && factor === 1) return { constant, terms: b.terms };
+  const terms = [...a.terms];
   for (const { body, weights } of b.terms) {
-    let target = terms.find((term) => term.body === body);
-    if (!target) {
-      target = { body, weights: {} };
-      terms.push(target);
+    const index = terms.findIndex((term) => term.body === body);
+    const sum = { ...terms[index]?.weights };
+    for (const key in weights) {
+      const measure = key as MeasureKey;
+      sum[measure] = (sum[measure] ?? 0) + factor * (weights[measure] as number);
     }
-    for (const key of Object.keys(weights) as MeasureKey[]) {
-      target.weights[key] = (target.weights[key] ?? 0) + factor * (weights[key] as number);
-    }
+    if (index < 0) terms.push({ body, weights: sum });
+    else terms[index] = { body, weights: sum };
   }
-  return { constant: a.constant + factor * b.constant, terms };
+  return { constant, terms };
 }
 
 /** `a` − `b`. */
@@ -77,7 +79,14 @@ const MOST_COMPONENTS = 8;
  * @returns a mixture; weights add to 1
  */
 export function jointOf(amounts: readonly Amount[]): JointComponent[] {
-  const bodies = new Set(amounts.flatMap(({ terms }) => terms.map(({ body }) => body)));
+  const bodies = new Set<Body>();
+  for (const { terms } of amounts) for (const { body } of terms) bodies.add(body);
+  if (bodies.size === 1) {
+    const [only] = [...bodies] as [Body];
+    return only.joint(
+      amounts.map(({ constant, terms }) => ({ constant, weights: terms[0]?.weights ?? NOTHING })),
+    );
+  }
   let joined: JointComponent[] = [
     {
       weight: 1,

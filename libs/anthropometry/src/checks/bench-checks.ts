@@ -126,7 +126,7 @@ export const placeWidth: PieceCheck = {
     const load = codeLoad(rule, bench.lengthMm);
     return question({
       value,
-      setLedger: [
+      setLedger: () => [
         { label: `length of ${bench.mark}`, value: bench.lengthMm, kind: 'term' },
         { label: 'places claimed', value: count, kind: 'term' },
         { label: 'width of a place', value: bench.lengthMm / count, kind: 'total' },

@@ -9,14 +9,14 @@ import type {
   Verdict,
   VerdictOutcome,
 } from './fit-sheet.ts';
-import { sinkUnder, type Asked, type PersonCheck, type Said } from './person-check.ts';
+import { sinkUnder, type Answer, type Asked, type PersonCheck, type Said } from './person-check.ts';
 import { PERSON_CHECKS } from './person-checks.ts';
 import type { CheckSettings, PieceAnswer, PieceAsked, Seated } from './piece-check.ts';
 import { PIECE_CHECKS } from './piece-checks.ts';
 import type { Rule, RuleBook } from './rule-book.ts';
 import { REFERENCE_SITTER_KG } from './seat-sink.ts';
 import type { PlaceSituation, SetSituation } from './situation.ts';
-import { judge, type Judgement } from './verdict.ts';
+import { find, judge, writeOut, type Judgement } from './verdict.ts';
 
 /** Everything a fit sheet is made from. */
 export interface CheckInput {
@@ -72,13 +72,11 @@ const judgementOf = ({ ruleBook, settings }: CheckInput, rule: Rule): Judgement 
 function rowOf(input: CheckInput, sitter: Sitter, place: PlaceSituation | undefined): SitterRow {
   const { ruleBook, model } = input;
   const body = model.predict(sitter.person);
+  const sink = sinkUnder(place?.foam, body);
   const cells = PERSON_CHECKS.map((check): FitCell => {
     const rule = ruleBook.rule(check.id);
     const placed: Answered = place
-      ? answered(
-          check.ask({ rule, place, name: sitter.name, body, sink: sinkUnder(place.foam, body), model }),
-          judgementOf(input, rule),
-        )
+      ? answered(check.ask({ rule, place, name: sitter.name, body, sink, model }), judgementOf(input, rule))
       : { outcome: { kind: 'doesNotApply', reason: 'no such place' }, pieces: [] };
     return {
       id: `${rule.id}|${sitter.placeId}`,
@@ -116,15 +114,30 @@ interface Answered {
 function answered(said: Said, judgement: Judgement): Answered {
   if ('reason' in said) return { outcome: { kind: 'doesNotApply', reason: said.reason }, pieces: [] };
   if ('information' in said) return { outcome: { kind: 'information', ...said.information }, pieces: [] };
-  const judged = said.map(({ question, pieces = [], side }) => ({
-    outcome: judge(question, judgement),
+  const [{ answer, finding }] = worstFirst(said, judgement);
+  const { question, pieces = [], side } = answer;
+  return {
+    outcome: writeOut(question, finding, judgement),
     pieces,
     ...(side ? { side } : {}),
-  }));
-  return judged.reduce((a, b) => (isWorse(b.outcome, a.outcome) ? b : a));
+  };
 }
 
-function isWorse(a: VerdictOutcome, b: VerdictOutcome): boolean {
+interface Found {
+  answer: Answer;
+  finding: ReturnType<typeof find>;
+}
+
+/** At least one answer, the worst first. */
+function worstFirst(answers: readonly Answer[], judgement: Judgement): [Found, ...Found[]] {
+  const found = answers.map((answer): Found => ({ answer, finding: find(answer.question, judgement) }));
+  found.sort((a, b) => (isWorse(a.finding, b.finding) ? -1 : isWorse(b.finding, a.finding) ? 1 : 0));
+  return found as [Found, ...Found[]];
+}
+
+type Ranked = Pick<VerdictOutcome, 'verdict' | 'margin'>;
+
+function isWorse(a: Ranked, b: Ranked): boolean {
   const rank = WORST_FIRST.indexOf(a.verdict) - WORST_FIRST.indexOf(b.verdict);
   return rank === 0 ? a.margin < b.margin : rank < 0;
 }
@@ -144,36 +157,44 @@ function publicRowOf(input: CheckInput): PublicRow {
     const personal = ruleBook.rule(check.id);
     const rule = personal.publicRule ? ruleBook.rule(personal.publicRule) : personal;
     const judgement = judgementOf(input, rule);
-    let worst: { answer: Answered; place: PlaceSituation | undefined } = {
-      answer: { outcome: { kind: 'doesNotApply', reason: 'no place' }, pieces: [] },
-      place: undefined,
-    };
-    for (const place of situation.places) {
-      const answer = answered(askPublic(check, publicAsked(input, rule, place)), judgement);
-      if (standsBefore(answer.outcome, worst.answer.outcome)) worst = { answer, place };
-    }
-    const { answer, place } = worst;
+    const { said, place } = worstPlace(input, check, rule, judgement);
+    const { outcome, pieces, side } = answered(said, judgement);
     return {
       id: `${rule.id}|public`,
       ruleId: rule.id,
       scope: rule.scope,
       ...(place ? { placeId: place.placeId } : {}),
-      ...cellPieces(place, answer.pieces),
-      ...(answer.side ? { side: answer.side } : {}),
-      outcome: answer.outcome,
+      ...cellPieces(place, pieces),
+      ...(side ? { side } : {}),
+      outcome,
       readAs: rule.publicRead?.readAs ?? 'a named sitter',
     };
   });
   return { cells };
 }
 
-const askPublic = (check: PersonCheck, asked: Asked): Said => (check.askPublic ?? check.ask)(asked);
-
-/** A verdict stands before any silence; of two verdicts the worse. */
-function standsBefore(a: Outcome, b: Outcome): boolean {
-  if (a.kind !== 'verdict') return b.kind === 'doesNotApply' && b.reason === 'no place';
-  return b.kind !== 'verdict' || isWorse(a, b);
+/** What a rule says of the public at the place where that is worst; a verdict stands before any silence. */
+function worstPlace(
+  input: CheckInput,
+  check: PersonCheck,
+  rule: Rule,
+  judgement: Judgement,
+): { said: Said; place?: PlaceSituation } {
+  let silent: { said: Said; place?: PlaceSituation } = { said: { reason: 'no place' } };
+  let worst: { said: Answer[]; place: PlaceSituation; finding: Found['finding'] } | undefined;
+  for (const place of input.situation.places) {
+    const said = askPublic(check, publicAsked(input, rule, place));
+    if (!Array.isArray(said)) {
+      if (!silent.place) silent = { said, place };
+      continue;
+    }
+    const [{ answer, finding }] = worstFirst(said, judgement);
+    if (!worst || isWorse(finding, worst.finding)) worst = { said: [answer], place, finding };
+  }
+  return worst ?? silent;
 }
+
+const askPublic = (check: PersonCheck, asked: Asked): Said => (check.askPublic ?? check.ask)(asked);
 
 function publicAsked({ model }: CheckInput, rule: Rule, place: PlaceSituation): Asked {
   const { bodyData, measure, percentile, readAs = 'anyone' } = rule.publicRead ?? {};

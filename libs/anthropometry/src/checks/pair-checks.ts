@@ -59,7 +59,7 @@ function facingQuestion(asked: PieceAsked, pair: readonly [string, string], gapM
   const between: Entry = ['room to move', fixed(by)];
   return question({
     value: fixed(gapMm),
-    setLedger: ledgerOf([['seat front to seat front', fixed(gapMm)]], 'gap'),
+    setLedger: () => ledgerOf([['seat front to seat front', fixed(gapMm)]], 'gap'),
     lower: { pass: [...knees, between], fail: [longest, between] },
   });
 }

@@ -70,21 +70,26 @@ export function sinkUnder(foam: FoamSituation | undefined, body: Body): Sink {
 }
 
 /** Pressed seat height under the sitter and the sum that leads to it. */
-export function pressedSeat(asked: Asked, at: 'front' | 'hip'): { height: Amount; ledger: LedgerLine[] } {
+export function pressedSeat(
+  asked: Asked,
+  at: 'front' | 'hip',
+): { height: Amount; ledger: () => LedgerLine[] } {
   const { place, name, sink } = asked;
   const top = at === 'front' ? place.seatTopFrontMm : place.seatTopHipMm;
-  const cushion = top - place.deckHeightMm;
-  const entries: Entry[] = [[`Deck of ${place.mark}`, fixed(place.deckHeightMm)]];
-  if (cushion !== 0) {
-    entries.push([at === 'front' ? 'cushion' : 'cushion, at the hip', fixed(cushion)]);
-  }
-  if (sink !== NO_SINK) {
-    const words = sink.bottomsOut ? 'sinks, foam bottoms out, under' : 'sinks under';
-    entries.push([`${words} ${name}`, times(sink.amount, -1)]);
-  }
   return {
     height: plus(fixed(top), sink.amount, -1),
-    ledger: ledgerOf(entries, `seat under ${name}`),
+    ledger: () => {
+      const cushion = top - place.deckHeightMm;
+      const entries: Entry[] = [[`Deck of ${place.mark}`, fixed(place.deckHeightMm)]];
+      if (cushion !== 0) {
+        entries.push([at === 'front' ? 'cushion' : 'cushion, at the hip', fixed(cushion)]);
+      }
+      if (sink !== NO_SINK) {
+        const words = sink.bottomsOut ? 'sinks, foam bottoms out, under' : 'sinks under';
+        entries.push([`${words} ${name}`, times(sink.amount, -1)]);
+      }
+      return ledgerOf(entries, `seat under ${name}`);
+    },
   };
 }
 

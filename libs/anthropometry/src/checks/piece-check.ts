@@ -64,7 +64,7 @@ export function plainQuestion(
 ): Question {
   return question({
     value: fixed(value),
-    setLedger: ledgerOf([[label, fixed(value)]], 'value'),
+    setLedger: () => ledgerOf([[label, fixed(value)]], 'value'),
     ...sides,
   });
 }

@@ -46,36 +46,40 @@ const terms = (entries: readonly Entry[]): LedgerLine[] =>
  */
 export function question(asked: {
   value: Amount;
-  setLedger: LedgerLine[];
+  setLedger: () => LedgerLine[];
   lower?: Side | undefined;
   upper?: Side | undefined;
 }): Question {
   const { value, setLedger, lower, upper } = asked;
-  return {
+  const question: Question = {
     value,
-    pass: {
-      ...(lower ? { lower: sumOf(lower.pass) } : {}),
-      ...(upper ? { upper: sumOf(upper.pass) } : {}),
-    },
-    fail: {
-      ...(lower ? { lower: failOf(lower) } : {}),
-      ...(upper ? { upper: failOf(upper) } : {}),
-    },
+    pass: {},
+    fail: {},
     setLedger,
     bodyLedger: (side) => {
       const lines = side === 'lower' ? lower : upper;
       return lines ? sideLedger(lines) : [];
     },
   };
+  if (lower) {
+    question.pass.lower = sumOf(lower.pass);
+    question.fail.lower = failOf(lower, question.pass.lower);
+  }
+  if (upper) {
+    question.pass.upper = sumOf(upper.pass);
+    question.fail.upper = failOf(upper, question.pass.upper);
+  }
+  return question;
 }
 
-const failOf = ({ pass, further, fail }: Side): Amount => sumOf(fail ?? [...pass, ...(further ?? [])]);
+const failOf = ({ further, fail }: Side, pass: Amount): Amount =>
+  fail ? sumOf(fail) : further ? plus(pass, sumOf(further)) : pass;
 
 function sideLedger(side: Side): LedgerLine[] {
   if (!side.further && !side.fail) return ledgerOf(side.pass, 'pass and fail line');
   return [
     ...ledgerOf(side.pass, 'pass line'),
     ...terms(side.fail ?? side.further ?? []),
-    { label: 'fail line', value: best(failOf(side)), kind: 'total' },
+    { label: 'fail line', value: best(failOf(side, sumOf(side.pass))), kind: 'total' },
   ];
 }

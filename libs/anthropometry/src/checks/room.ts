@@ -1,5 +1,5 @@
 import { bivariateNormalCdf } from '../people/bivariate.ts';
-import { normalCdf } from '../people/normal.ts';
+import { normalCdf, normalQuantile } from '../people/normal.ts';
 import { jointOf, minus, type Amount } from './amount.ts';
 
 /** Two lines that a value should keep between; either may be open. */
@@ -37,6 +37,27 @@ export function roomWithin(value: Amount, band: Band): Room[] {
 }
 
 /**
+ * The same room to other lines, where these differ from the first only by plain numbers.
+ *
+ * @param rooms - from `roomWithin` with the first band
+ * @param from - the first band
+ * @param to - the other band
+ * @returns the room, or `undefined` when the bands hang on different measures
+ */
+export function roomMoved(rooms: readonly Room[], from: Band, to: Band): Room[] | undefined {
+  if (from.lower?.terms !== to.lower?.terms || from.upper?.terms !== to.upper?.terms) return undefined;
+  const moves: number[] = [];
+  if (from.lower && to.lower) moves.push(from.lower.constant - to.lower.constant);
+  if (from.upper && to.upper) moves.push(to.upper.constant - from.upper.constant);
+  return rooms.map(({ weight, means, sds, correlation }) => ({
+    weight,
+    means: means.map((mean, i) => mean + (moves[i] as number)),
+    sds,
+    correlation,
+  }));
+}
+
+/**
  * Probability that the room on every side is at least so much.
  *
  * @param rooms - from `roomWithin`
@@ -46,12 +67,8 @@ export function roomWithin(value: Amount, band: Band): Room[] {
 export function probabilityOfRoom(rooms: readonly Room[], least: number): number {
   let sum = 0;
   for (const { weight, means, sds, correlation } of rooms) {
-    const limits = means.map((mean, i) => {
-      const sd = sds[i] as number;
-      if (sd > 0) return (mean - least) / sd;
-      return mean >= least ? Infinity : -Infinity;
-    });
-    const [h = Infinity, k = Infinity] = limits;
+    const h = standardRoom(means[0] as number, sds[0] as number, least);
+    const k = means.length > 1 ? standardRoom(means[1] as number, sds[1] as number, least) : Infinity;
     if (h === -Infinity || k === -Infinity) continue;
     if (h === Infinity) sum += weight * (k === Infinity ? 1 : normalCdf(k));
     else if (k === Infinity) sum += weight * normalCdf(h);
@@ -60,7 +77,13 @@ export function probabilityOfRoom(rooms: readonly Room[], least: number): number
   return Math.min(1, sum);
 }
 
+function standardRoom(mean: number, sd: number, least: number): number {
+  if (sd > 0) return (mean - least) / sd;
+  return mean >= least ? Infinity : -Infinity;
+}
+
 const STEPS = 60;
+const CLOSE_ENOUGH = 1e-5;
 
 /**
  * The room that a share p of such people have less than.
@@ -71,32 +94,40 @@ const STEPS = 60;
  * @returns rule's unit
  */
 export function roomQuantile(rooms: readonly Room[], p: number, tolerance = 0.02): number {
-  const spread = 8;
+  // Of two sides the lesser room counts: its quantile lies under both sides' own, and over their half-share ones.
+  const whole = normalQuantile(p);
+  const half = normalQuantile(p / 2);
   let low = Infinity;
   let high = -Infinity;
   for (const { means, sds } of rooms) {
-    low = Math.min(low, ...means.map((mean, i) => mean - spread * (sds[i] as number)));
-    high = Math.max(high, Math.min(...means.map((mean, i) => mean + spread * (sds[i] as number))));
+    const z = means.length > 1 ? half : whole;
+    low = Math.min(low, leastAt(means, sds, z));
+    high = Math.max(high, leastAt(means, sds, whole));
   }
-  // Regula falsi with halved ends: few evaluations, and it never leaves the bracket.
-  let fLow = -p;
-  let fHigh = 1 - p;
-  let kept = 0;
-  for (let step = 0; step < STEPS && high - low > tolerance; step += 1) {
-    const middle = step % 3 === 2 ? (low + high) / 2 : (low * fHigh - high * fLow) / (fHigh - fLow);
+  // Regula falsi with halved ends, and a plain halving every third step.
+  let fLow = 1 - probabilityOfRoom(rooms, low) - p;
+  let fHigh = 1 - probabilityOfRoom(rooms, high) - p;
+  if (Math.abs(fHigh) < CLOSE_ENOUGH) return high;
+  if (Math.abs(fLow) < CLOSE_ENOUGH) return low;
+  let last = 0;
+  for (let step = 1; step < STEPS && high - low > tolerance; step += 1) {
+    const middle = step % 3 === 0 ? (low + high) / 2 : (low * fHigh - high * fLow) / (fHigh - fLow);
     const f = 1 - probabilityOfRoom(rooms, middle) - p;
-    if (Math.abs(f) < 1e-5) return middle;
-    if (f < 0) {
+    if (Math.abs(f) < CLOSE_ENOUGH) return middle;
+    const sign = Math.sign(f);
+    if (sign < 0) {
       low = middle;
       fLow = f;
-      if (kept < 0) fHigh /= 2;
-      kept = -1;
+      if (last < 0) fHigh /= 2;
     } else {
       high = middle;
       fHigh = f;
-      if (kept > 0) fLow /= 2;
-      kept = 1;
+      if (last > 0) fLow /= 2;
     }
+    last = sign;
   }
   return (low + high) / 2;
 }
+
+const leastAt = (means: readonly number[], sds: readonly number[], z: number): number =>
+  Math.min(...means.map((mean, i) => mean + z * (sds[i] as number)));

@@ -148,20 +148,26 @@ const MM_PER_INCH = 25.4;
  * @throws RangeError when the rule has no such number
  */
 export function ruleNumber(rule: Rule, name: string): number {
-  const { numbers } = rule;
-  const inches = numbers[`${name}In`];
-  const value =
-    numbers[`${name}Mm`] ??
-    (inches === undefined ? undefined : inches * MM_PER_INCH) ??
-    numbers[`${name}Deg`] ??
-    numbers[name];
+  let numbers = byName.get(rule);
+  if (!numbers) {
+    numbers = new Map(
+      Object.entries(rule.numbers).map(([key, value]) =>
+        key.endsWith('In') ? [key.slice(0, -2), value * MM_PER_INCH] : [key.replace(/(Mm|Deg)$/, ''), value],
+      ),
+    );
+    byName.set(rule, numbers);
+  }
+  const value = numbers.get(name);
   if (value === undefined) {
     throw new RangeError(
-      `Fit rules: ${rule.id} has no number ${name}; accepted: ${Object.keys(numbers).join(', ')}`,
+      `Fit rules: ${rule.id} has no number ${name}; accepted: ${Object.keys(rule.numbers).join(', ')}`,
     );
   }
   return value;
 }
+
+/** Numbers of a rule by their name without the unit. */
+const byName = new WeakMap<Rule, Map<string, number>>();
 
 /**
  * The plain sentence of a rule about one sitter.

@@ -95,7 +95,8 @@ function depthAnswer(asked: Asked, bothSides: boolean): Said {
     {
       question: question({
         value: fixed(place.effectiveDepthMm),
-        setLedger: ledgerOf([['back cushion to seat front', fixed(place.effectiveDepthMm)]], 'seat depth'),
+        setLedger: () =>
+          ledgerOf([['back cushion to seat front', fixed(place.effectiveDepthMm)]], 'seat depth'),
         lower: bothSides ? side('Lower', 'thigh that may stand out') : undefined,
         upper: side('Upper', 'gap behind the knee'),
       }),
@@ -116,7 +117,7 @@ export const hipWidth: PersonCheck = {
       {
         question: question({
           value: fixed(asked.place.widthMm),
-          setLedger: ledgerOf([['width of the place', fixed(asked.place.widthMm)]], 'place'),
+          setLedger: () => ledgerOf([['width of the place', fixed(asked.place.widthMm)]], 'place'),
           lower: {
             pass: [measureEntry(asked.body, 'hip_breadth_sitting'), ['clothing', fixed(clothing)]],
             further: [['allowance for tight', fixed(-clothing)]],
@@ -160,8 +161,8 @@ function backAnswer(asked: Asked, pass: Entry[]): Said {
     {
       question: question({
         value: plus(fixed(backTopMm), height, -1),
-        setLedger: [
-          ...ledger,
+        setLedger: () => [
+          ...ledger(),
           ...ledgerOf(
             [
               [`Top of the back of ${asked.place.mark}`, fixed(backTopMm)],

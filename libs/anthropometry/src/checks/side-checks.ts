@@ -37,7 +37,7 @@ const overSeat = (asked: Asked, sill: SillSituation) => {
   ];
   return {
     value: minus(fixed(sill.topMm), height),
-    setLedger: [...ledger, ...ledgerOf(entries, 'sill over the seat')],
+    setLedger: () => [...ledger(), ...ledgerOf(entries, 'sill over the seat')],
   };
 };
 
@@ -90,10 +90,11 @@ export const sillReach: PersonCheck = {
       const { body, rule } = asked;
       return question({
         value: fixed(sill.centreToEdgeMm),
-        setLedger: ledgerOf(
-          [[`seat centre to the edge of ${sill.mark}`, fixed(sill.centreToEdgeMm)]],
-          'sideways to the sill',
-        ),
+        setLedger: () =>
+          ledgerOf(
+            [[`seat centre to the edge of ${sill.mark}`, fixed(sill.centreToEdgeMm)]],
+            'sideways to the sill',
+          ),
         lower: {
           pass: [
             measureEntry(body, 'hip_breadth_sitting', 0.5),
@@ -130,7 +131,7 @@ export const viewOverSill: PersonCheck = {
       ];
       return question({
         value: entries.reduce((sum, [, amount]) => plus(sum, amount), fixed(0)),
-        setLedger: [...ledger, ...ledgerOf(entries, 'eye over the sill')],
+        setLedger: () => [...ledger(), ...ledgerOf(entries, 'eye over the sill')],
         lower: {
           pass: [['set by the rule', fixed(pass)]],
           further: allowance(ruleNumber(rule, 'fail') - pass),
@@ -164,8 +165,8 @@ function headAnswer(asked: Asked, extras: [label: string, number: string][]): Sa
     {
       question: question({
         value: minus(fixed(overhead.undersideMm), height),
-        setLedger: [
-          ...ledger,
+        setLedger: () => [
+          ...ledger(),
           ...ledgerOf(
             [
               [`Underside of ${overhead.mark}`, fixed(overhead.undersideMm)],
@@ -215,7 +216,7 @@ function besideWalls(asked: Asked, lower: Side): Said {
     answers.push({
       question: question({
         value: fixed(wallMm),
-        setLedger: ledgerOf([[`seat centre to the wall, ${side} hand`, fixed(wallMm)]], 'elbow room'),
+        setLedger: () => ledgerOf([[`seat centre to the wall, ${side} hand`, fixed(wallMm)]], 'elbow room'),
         lower,
       }),
       side,

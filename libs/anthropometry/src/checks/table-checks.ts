@@ -35,7 +35,7 @@ function aboveSeat(
   const { height, ledger } = pressedSeat(asked, 'hip');
   return {
     value: minus(entry[1], height),
-    setLedger: [...ledger, ...ledgerOf([entry, ['less the seat', times(height, -1)]], total)],
+    setLedger: () => [...ledger(), ...ledgerOf([entry, ['less the seat', times(height, -1)]], total)],
   };
 }
 
@@ -76,10 +76,8 @@ export const kneeRoom: PersonCheck = {
       const by = ruleNumber(asked.rule, 'allowance');
       return question({
         value: fixed(table.undersideMm),
-        setLedger: ledgerOf(
-          [[`Underside of ${table.mark}`, fixed(table.undersideMm)]],
-          'room over the floor',
-        ),
+        setLedger: () =>
+          ledgerOf([[`Underside of ${table.mark}`, fixed(table.undersideMm)]], 'room over the floor'),
         lower: {
           pass: [
             measureEntry(asked.body, 'knee_height_sitting'),
@@ -157,7 +155,7 @@ const bellyAnswer = (asked: Asked, passAllowance: number): Said =>
     ];
     return question({
       value: fixed(place.effectiveDepthMm - table.overlapMm),
-      setLedger: ledgerOf(entries, 'back to table edge'),
+      setLedger: () => ledgerOf(entries, 'back to table edge'),
       lower: {
         pass: [
           measureEntry(body, 'abdominal_extension_depth_sitting'),
@@ -212,7 +210,8 @@ function depthAnswer(asked: Asked, level: 'knee' | 'foot', lower: Side): Said {
       table,
       question({
         value: fixed(depthMm),
-        setLedger: ledgerOf([[`edge of ${table.mark} to the obstruction`, fixed(depthMm)]], `${level} depth`),
+        setLedger: () =>
+          ledgerOf([[`edge of ${table.mark} to the obstruction`, fixed(depthMm)]], `${level} depth`),
         lower,
       }),
     ),

@@ -1,7 +1,7 @@
 import type { MeasureKey } from '../measures/measures.ts';
 import { best, minus, predictedMeasures, type Amount } from './amount.ts';
 import type { LedgerLine, LimitLines, Verdict, VerdictOutcome } from './fit-sheet.ts';
-import { probabilityOfRoom, roomQuantile, roomWithin, type Band } from './room.ts';
+import { probabilityOfRoom, roomMoved, roomQuantile, roomWithin, type Band } from './room.ts';
 
 /** What a rule asks: a value, and the lines it should keep between. */
 export interface Question {
@@ -10,7 +10,7 @@ export interface Question {
   fail: Band;
   /** The sum that leads to the lines of the side that is nearest. */
   bodyLedger: (side: 'lower' | 'upper') => LedgerLine[];
-  setLedger: LedgerLine[];
+  setLedger: () => LedgerLine[];
 }
 
 /** How sure a verdict must be, and how far past a line still counts as on it. */
@@ -24,6 +24,18 @@ const WORTH_MEASURING = 0.05;
 const MOST_MEASURES = 3;
 const ROUNDING = 1e-9;
 
+/** A verdict before its sums are written out. */
+interface Finding extends Pick<
+  VerdictOutcome,
+  'verdict' | 'value' | 'pass' | 'fail' | 'margin' | 'probability'
+> {
+  marginRange: VerdictOutcome['marginRange'];
+  /** The side of the nearest fail line. */
+  side: 'lower' | 'upper';
+  /** What was not taken from the sitter. */
+  predicted: Predicted;
+}
+
 /**
  * Judges one question: the value against its lines, for all that is not known of the sitter.
  *
@@ -32,86 +44,116 @@ const ROUNDING = 1e-9;
  *
  * @param question - value and lines in the rule's unit
  * @param judgement - probability asked for, and the tolerance in the rule's unit; a boundary belongs to the better side
- * @returns the verdict with value, lines, margin to the nearest fail line and both sums
+ * @returns the finding, to be written out by `writeOut`
  */
-export function judge(question: Question, judgement: Judgement): VerdictOutcome {
-  const { value, pass, fail } = question;
+export function find(question: Question, judgement: Judgement): Finding {
   const predicted = predictedIn(question);
-  const estimated = predicted.length > 0;
+  const pass = linesOf(question.pass);
+  const fail = linesOf(question.fail);
+  const value = best(question.value);
+  const toLower = fail.lower === undefined ? Infinity : value - fail.lower;
+  const toUpper = fail.upper === undefined ? Infinity : fail.upper - value;
 
-  const failRooms = roomWithin(value, fail);
-  const insideFailAlone = probabilityOfRoom(failRooms, -judgement.tolerance);
-  const insidePass = probabilityOfRoom(roomWithin(value, pass), -judgement.tolerance);
-  const insideFail = Math.max(insideFailAlone, insidePass);
-  const verdict = verdictOf(insidePass, insideFail, judgement.confidence);
-
-  const limits = linesOf(fail);
-  const at = best(value);
-  const toLower = limits.lower === undefined ? Infinity : at - limits.lower;
-  const toUpper = limits.upper === undefined ? Infinity : limits.upper - at;
-  const side = toLower <= toUpper ? 'lower' : 'upper';
-
+  let probability: VerdictOutcome['probability'];
+  let marginRange: VerdictOutcome['marginRange'];
+  if (predicted.length === 0) {
+    const insidePass = isWithin(value, pass, judgement.tolerance) ? 1 : 0;
+    const insideFail = isWithin(value, fail, judgement.tolerance) ? 1 : insidePass;
+    probability = { pass: insidePass, insideFail };
+  } else {
+    const passRooms = roomWithin(question.value, question.pass);
+    const failRooms =
+      roomMoved(passRooms, question.pass, question.fail) ?? roomWithin(question.value, question.fail);
+    const insidePass = probabilityOfRoom(passRooms, -judgement.tolerance);
+    const insideFail = Math.max(insidePass, probabilityOfRoom(failRooms, -judgement.tolerance));
+    probability = { pass: insidePass, insideFail };
+    marginRange = { low: roomQuantile(failRooms, 0.05), high: roomQuantile(failRooms, 0.95) };
+  }
   return {
-    kind: 'verdict',
-    verdict,
-    value: at,
-    pass: linesOf(pass),
-    fail: limits,
+    verdict: verdictFor(probability, judgement.confidence),
+    value,
+    pass,
+    fail,
     margin: Math.min(toLower, toUpper),
-    ...(estimated
-      ? { marginRange: { low: roomQuantile(failRooms, 0.05), high: roomQuantile(failRooms, 0.95) } }
-      : {}),
-    estimated,
-    probability: { pass: insidePass, insideFail },
-    settleWith:
-      estimated && isUncertain(insidePass, insideFail, judgement.confidence)
-        ? mostUseful(question, side, predicted)
-        : [],
-    bodyLedger: question.bodyLedger(side),
-    setLedger: question.setLedger,
+    probability,
+    marginRange,
+    side: toLower <= toUpper ? 'lower' : 'upper',
+    predicted,
   };
 }
+
+const isWithin = (value: number, { lower, upper }: LimitLines, tolerance: number): boolean =>
+  (lower === undefined || value >= lower - tolerance) && (upper === undefined || value <= upper + tolerance);
+
+/**
+ * Adds to a finding both sums, and for an uncertain one the measures that would settle it.
+ *
+ * @param question - the question that was judged
+ * @param finding - what `find` said of it
+ * @param judgement - as given to `find`
+ * @returns the verdict as the sheet holds it
+ */
+export function writeOut(question: Question, finding: Finding, judgement: Judgement): VerdictOutcome {
+  const { verdict, value, pass, fail, margin, probability, marginRange, side, predicted } = finding;
+  const uncertain = predicted.length > 0 && isUncertain(probability, judgement.confidence);
+  const outcome: VerdictOutcome = {
+    kind: 'verdict',
+    verdict,
+    value,
+    pass,
+    fail,
+    margin,
+    estimated: predicted.length > 0,
+    probability,
+    settleWith: uncertain ? mostUseful(question, side, predicted) : [],
+    bodyLedger: question.bodyLedger(side),
+    setLedger: question.setLedger(),
+  };
+  if (marginRange) outcome.marginRange = marginRange;
+  return outcome;
+}
+
+/** Judges one question and writes it out: see `find` and `writeOut`. */
+export const judge = (question: Question, judgement: Judgement): VerdictOutcome =>
+  writeOut(question, find(question, judgement), judgement);
 
 /**
  * The verdict that two probabilities give.
  *
- * @param insidePass - probability of keeping within the pass lines
- * @param insideFail - probability of keeping within the fail lines; >= insidePass
+ * @param probability - of keeping within the pass lines, and within the fail lines; the second at least the first
  * @param confidence - probability asked for
  * @returns one of the four verdicts
  */
-export function verdictOf(insidePass: number, insideFail: number, confidence: number): Verdict {
+export function verdictFor({ pass, insideFail }: VerdictOutcome['probability'], confidence: number): Verdict {
   const asked = confidence - ROUNDING;
-  if (insidePass >= asked) return 'fits';
+  if (pass >= asked) return 'fits';
   if (1 - insideFail >= asked) return 'wontFit';
   return insideFail >= asked ? 'tight' : 'notKnown';
 }
 
 /** True when none of the three plain answers is as sure as asked. */
-function isUncertain(insidePass: number, insideFail: number, confidence: number): boolean {
-  return Math.max(insidePass, insideFail - insidePass, 1 - insideFail) < confidence - ROUNDING;
+function isUncertain({ pass, insideFail }: VerdictOutcome['probability'], confidence: number): boolean {
+  return Math.max(pass, insideFail - pass, 1 - insideFail) < confidence - ROUNDING;
 }
 
 function linesOf({ lower, upper }: Band): LimitLines {
-  return {
-    ...(lower ? { lower: best(lower) } : {}),
-    ...(upper ? { upper: best(upper) } : {}),
-  };
+  const lines: LimitLines = {};
+  if (lower) lines.lower = best(lower);
+  if (upper) lines.upper = best(upper);
+  return lines;
 }
 
 type Predicted = ReturnType<typeof predictedMeasures>;
 
 function predictedIn({ value, pass, fail }: Question): Predicted {
-  const seen = new Map<string, Predicted[number]>();
-  const bodies: unknown[] = [];
+  const found: Predicted = [];
   for (const amount of [value, pass.lower, pass.upper, fail.lower, fail.upper]) {
     if (!amount || amount.terms.length === 0) continue;
     for (const entry of predictedMeasures(amount)) {
-      if (!bodies.includes(entry.body)) bodies.push(entry.body);
-      seen.set(`${bodies.indexOf(entry.body)}|${entry.key}`, entry);
+      if (!found.some(({ body, key }) => body === entry.body && key === entry.key)) found.push(entry);
     }
   }
-  return [...seen.values()];
+  return found;
 }
 
 /** Measures ordered by how much of the margin's variance goes once they are known. */

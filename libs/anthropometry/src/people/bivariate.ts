@@ -12,8 +12,11 @@ const WEIGHTS = [
 /** Correlation above which the integral over the angle gets too steep. */
 const STEEP = 0.9;
 const FAR = 8.5;
+/** Standard deviations beyond which less than 1 in ten thousand million is left. */
+const SURE = 6.5;
 
 function integrate(f: (x: number) => number, from: number, to: number): number {
+  if (to === from) return 0;
   const half = (to - from) / 2;
   const middle = (to + from) / 2;
   let sum = 0;
@@ -38,6 +41,13 @@ export function bivariateNormalCdf(h: number, k: number, correlation: number): n
   if (h < -FAR || k < -FAR) return 0;
   if (h > FAR) return normalCdf(k);
   if (k > FAR) return normalCdf(h);
+  // Near full correlation the sum (or the difference) of the two hardly varies, and often that settles it.
+  const sum = (h + k) / Math.sqrt(2 * (1 + correlation));
+  if (sum < -SURE) return 0;
+  if (sum > SURE && correlation < 0) return Math.max(0, normalCdf(h) - normalCdf(-k));
+  if (Math.abs(h - k) > SURE * Math.sqrt(2 * (1 - correlation)) && correlation > 0) {
+    return normalCdf(Math.min(h, k));
+  }
   if (correlation > 1 - 1e-12) return normalCdf(Math.min(h, k));
   if (correlation < -1 + 1e-12) return Math.max(0, normalCdf(h) - normalCdf(-k));
   if (Math.abs(correlation) < STEEP) {
@@ -53,13 +63,18 @@ export function bivariateNormalCdf(h: number, k: number, correlation: number): n
 function conditionalIntegral(h: number, k: number, correlation: number): number {
   const rest = Math.sqrt(1 - correlation * correlation);
   const f = (x: number): number => normalDensity(x) * normalCdf((k - correlation * x) / rest);
-  // The second factor falls from 1 to 0 around this point, over a few times `rest`.
+  // The second factor goes from 0 to 1 over a few times `rest` around this point; beyond, it is 0 or 1.
   const step = k / correlation;
   const reach = (7 * rest) / Math.abs(correlation);
-  const cuts = [-FAR, -4, 0, 4, step - reach, step - reach / 3, step, step + reach / 3, step + reach, h]
-    .filter((x) => x >= -FAR && x <= h)
-    .sort((a, b) => a - b);
-  let sum = 0;
-  for (let i = 1; i < cuts.length; i += 1) sum += integrate(f, cuts[i - 1] as number, cuts[i] as number);
-  return Math.min(1, Math.max(0, sum));
+  const from = Math.max(step - reach, -FAR);
+  const to = Math.min(step + reach, h);
+  let share = 0;
+  if (correlation > 0) share += normalCdf(Math.min(h, step - reach));
+  else if (h > step + reach) share += normalCdf(h) - normalCdf(step + reach);
+  if (to > from) {
+    const first = Math.min(to, Math.max(from, step - reach / 3));
+    const second = Math.min(to, Math.max(from, step + reach / 3));
+    share += integrate(f, from, first) + integrate(f, first, second) + integrate(f, second, to);
+  }
+  return Math.min(1, Math.max(0, share));
 }

@@ -83,19 +83,24 @@ export function bodyFrom(person: KnownPerson, parts: readonly WeightedPosterior[
   const joint = (combinations: readonly Linear[]): JointComponent[] =>
     parts.map((part) => {
       const rows = combinations.map((x) => sparse(part, x));
-      const covariances = rows.map((a) => rows.map((b) => covarianceOf(part, a, b)));
-      covariances.forEach((row, i) => {
-        if ((row[i] as number) >= ROUNDING_VARIANCE) return;
-        covariances.forEach((other, j) => {
-          row[j] = 0;
-          other[i] = 0;
-        });
-      });
-      return {
-        weight: part.weight,
-        means: rows.map((row, i) => meanOf(part, row, (combinations[i] as Linear).constant)),
-        covariances,
-      };
+      const size = rows.length;
+      const means = rows.map((row, i) => meanOf(part, row, (combinations[i] as Linear).constant));
+      const covariances = rows.map(() => new Array<number>(size).fill(0));
+      for (let i = 0; i < size; i += 1) {
+        for (let j = i; j < size; j += 1) {
+          const covariance = covarianceOf(part, rows[i] as SparseRow, rows[j] as SparseRow);
+          (covariances[i] as number[])[j] = covariance;
+          (covariances[j] as number[])[i] = covariance;
+        }
+      }
+      for (let i = 0; i < size; i += 1) {
+        if ((covariances[i]?.[i] as number) >= ROUNDING_VARIANCE) continue;
+        for (let j = 0; j < size; j += 1) {
+          (covariances[i] as number[])[j] = 0;
+          (covariances[j] as number[])[i] = 0;
+        }
+      }
+      return { weight: part.weight, means, covariances };
     });
 
   const single = (key: MeasureKey): Linear => ({ constant: 0, weights: { [key]: 1 } });
