@@ -1,3 +1,4 @@
+import type { ServerResponse } from 'node:http';
 import { join, sep } from 'node:path';
 import type { NestExpressApplication } from '@nestjs/platform-express';
 import type { NextFunction, Request, Response } from 'express';
@@ -11,7 +12,7 @@ const NO_PAGE = /^\/+(api|assets)(\/|$)/i;
 export function serveWebApp(app: NestExpressApplication, webDist: string): void {
   app.useStaticAssets(webDist, {
     index: false,
-    setHeaders: (response, path) => {
+    setHeaders: (response: ServerResponse, path: string) => {
       const hashed = path.includes(`${sep}assets${sep}`);
       response.setHeader('Cache-Control', hashed ? 'public, max-age=31536000, immutable' : 'no-cache');
     },
