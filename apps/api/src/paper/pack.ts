@@ -22,6 +22,10 @@ export class Pack {
   private readonly doc: jsPDF;
   private sheets = 0;
 
+  get sheetCount(): number {
+    return this.sheets;
+  }
+
   constructor(private readonly options: PackOptions) {
     this.doc = new jsPDF({
       unit: 'mm',

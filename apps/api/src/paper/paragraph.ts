@@ -25,7 +25,7 @@ export function breakLines(sheet: Sheet, prose: Prose, width: number, style: Tex
   let line: Line = [];
   let used = 0;
   for (const word of wordsOf(sheet, prose, width, style)) {
-    const space = word.spaceBefore && line.length > 0 ? sheet.textWidth(' ', { ...style, ...word }) : 0;
+    const space = word.spaceBefore && line.length > 0 ? sheet.measure(' ', { ...style, ...word }) : 0;
     const breaks = word.spaceBefore || used + word.width > width;
     if (line.length > 0 && breaks && used + space + word.width > width) {
       lines.push(line);
@@ -54,7 +54,7 @@ export function paragraph(
     for (const piece of joined(line)) {
       const pieceStyle = { ...style, weight: piece.weight };
       sheet.text(piece.text, at, baseline, pieceStyle);
-      at += sheet.textWidth(piece.text, pieceStyle);
+      at += sheet.measure(piece.text, pieceStyle);
     }
     baseline += leading(style.size ?? 9);
   }
@@ -93,7 +93,7 @@ function* wordsOf(sheet: Sheet, prose: Prose, width: number, style: TextStyle): 
         yield {
           text: bit,
           weight,
-          width: sheet.textWidth(bit, { ...style, weight }),
+          width: sheet.measure(bit, { ...style, weight }),
           spaceBefore: afterSpace,
         };
         afterSpace = false;
@@ -103,11 +103,11 @@ function* wordsOf(sheet: Sheet, prose: Prose, width: number, style: TextStyle): 
 }
 
 function cut(sheet: Sheet, word: string, width: number, style: TextStyle): string[] {
-  if (sheet.textWidth(word, style) <= width) return [word];
+  if (sheet.measure(word, style) <= width) return [word];
   const bits: string[] = [];
   let bit = '';
   for (const character of word) {
-    if (bit !== '' && sheet.textWidth(bit + character, style) > width) {
+    if (bit !== '' && sheet.measure(bit + character, style) > width) {
       bits.push(bit);
       bit = '';
     }

@@ -9,6 +9,19 @@ export interface Fact {
 const PAD_TOP = 3.6;
 const PAD_BOTTOM = 1.3;
 
+/** Height that one fact takes. */
+export function factHeight(
+  sheet: Sheet,
+  { label, value }: Fact,
+  box: { width: number; labelWidth: number },
+): number {
+  const lines = Math.max(
+    linesNeeded(sheet, value, box.width - box.labelWidth),
+    linesNeeded(sheet, label, box.labelWidth - 1.5),
+  );
+  return PAD_TOP + PAD_BOTTOM + (Math.max(1, lines) - 1) * leading(9);
+}
+
 /** Two columns of words, each row closed by a hairline. Returns y under the last rule. */
 export function drawFacts(
   sheet: Sheet,
@@ -19,8 +32,8 @@ export function drawFacts(
   const valueWidth = box.width - box.labelWidth;
   for (const { label, value } of facts) {
     paragraph(sheet, label, box.x, y + PAD_TOP, box.labelWidth - 1.5);
-    const after = paragraph(sheet, value, box.x + box.labelWidth, y + PAD_TOP, valueWidth, { weight: 400 });
-    y = after - leading(9) + PAD_BOTTOM;
+    paragraph(sheet, value, box.x + box.labelWidth, y + PAD_TOP, valueWidth);
+    y += factHeight(sheet, { label, value }, box);
     sheet.line(box.x, y, box.x + box.width, y, { pen: PEN.hair });
   }
   return y;

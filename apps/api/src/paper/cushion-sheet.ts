@@ -1,0 +1,288 @@
+import { drawButtonTable } from './button-table';
+import { CHECK_BAR_MM, drawCheckBar } from './check-bar';
+import { type CushionPlan, drawCushionPlan, PLAN_SPACE, spaces } from './cushion-plan';
+import { drawCushionCut, drawCushionFront } from './cushion-views';
+import { scaleFor } from './drawing-scale';
+import { paragraph } from './paragraph';
+import { drawFacts, type Fact } from './ruled-table';
+import { leading, PEN, type Sheet } from './sheet';
+import type { SpecCushion, SpecPack } from './spec-pack';
+import {
+  bareLength,
+  foamWords,
+  handWords,
+  massWords,
+  otherSystemWords,
+  pairWords,
+  runWords,
+  sinkWords,
+  sizeWords,
+  volumeWords,
+} from './spec-words';
+import { formatLength, lengthStep } from '@settlewright/geometry';
+import { type Frame, frameOf } from './title-block';
+
+export const FACTS_WIDTH_MM = 98;
+const PAD = 4;
+const FOOT_MM = 34;
+
+/** One sheet for cushions that are made alike. */
+export function drawCushionSheet(sheet: Sheet, pack: SpecPack, cushion: SpecCushion): void {
+  const frame = frameOf(sheet);
+  const split = frame.right - FACTS_WIDTH_MM;
+  sheet.line(split, frame.top, split, frame.bottom, { pen: PEN.fine });
+  drawFigures(sheet, pack, cushion, { ...frame, right: split });
+  drawFactsColumn(sheet, pack, cushion, { ...frame, left: split });
+}
+
+function drawFigures(sheet: Sheet, pack: SpecPack, cushion: SpecCushion, frame: Frame): void {
+  const { units } = pack;
+  const left = frame.left + PAD;
+  const right = frame.right - PAD;
+  const width = right - left;
+  const view = cushion.kind === 'seat' ? 'from above, back edge up' : 'from the front, top edge up';
+  paragraph(sheet, `${headMarks(cushion)} ${view}`, left, frame.top + 6.2, width - 52, {
+    size: 10.5,
+    weight: 600,
+  });
+  const hand =
+    cushion.hand === 'either' ? 'no hand: both ends alike' : `drawn: ${cushion.hand} hand as sat in`;
+  sheet.text(hand, right, frame.top + 6.2, { weight: 600, align: 'right' });
+
+  const { widthMm, depthMm, thicknessMm } = cushion.finished;
+  const wallGap = cushion.buttons.wall?.gapMm ?? 0;
+  const planSpace = {
+    widthMm: width - PLAN_SPACE.left - PLAN_SPACE.right,
+    heightMm: frame.bottom - frame.top - FOOT_MM - 62,
+  };
+  // A usual gap finds room beside the wall's name.
+  const real = { widthMm: widthMm + Math.max(0, wallGap - 40), heightMm: depthMm + thicknessMm };
+  const scale = scaleFor(units.system, real, planSpace);
+  const { factor } = scale;
+  const quietLine = cushion.buttons.wall ? 8 : 0;
+  const place = {
+    x: left + PLAN_SPACE.left + (cushion.buttons.wall?.side === 'left' ? wallGap * factor : 0),
+    y: frame.top + 21 + quietLine,
+    factor,
+    format: (mm: number) => formatLength(mm, { ...units, feet: false }),
+    stepMm: lengthStep(units),
+  };
+  drawCushionPlan(sheet, planOf(cushion, pack), place);
+
+  let y = place.y + depthMm * factor + PLAN_SPACE.bottom;
+  y = drawSums(sheet, pack, cushion, { x: left, y, width });
+  const front = y + 9.5;
+  sheet.text('From the front', left, y + 5.4);
+  drawCushionFront(
+    sheet,
+    {
+      widthMm,
+      thicknessMm,
+      words: `boxing ${formatLength(thicknessMm, { ...units, feet: false })} between welt seams; crown up to ${units.system === 'millimetres' ? '6 mm' : '¼″'} more`,
+      thicknessWords: formatLength(thicknessMm, { ...units, feet: false }),
+    },
+    { x: place.x, y: front, factor },
+  );
+  drawFoot(sheet, pack, cushion, {
+    left,
+    right,
+    top: frame.bottom - FOOT_MM,
+    factor,
+    scaleWords: scale.words,
+  });
+}
+
+function planOf(cushion: SpecCushion, { units }: SpecPack): CushionPlan {
+  const { zip } = cushion;
+  const { rowsMm, columnsMm, datum, boardLinesMm, wall } = cushion.buttons;
+  return {
+    widthMm: cushion.finished.widthMm,
+    depthMm: cushion.finished.depthMm,
+    columnsMm,
+    rowsMm,
+    datum,
+    boardLinesMm,
+    wall,
+    edges: cushion.edges,
+    zip: zip && { lengthMm: zip.lengthMm, wrapMm: zip.wrapMm, words: `zip ${zipSum(zip, units)}` },
+  };
+}
+
+function zipSum(zip: NonNullable<SpecCushion['zip']>, units: SpecPack['units']): string {
+  const whole = formatLength(zip.lengthMm, { ...units, feet: false });
+  if (zip.wrapMm <= 0) return whole;
+  const wrap = bareLength(zip.wrapMm, units);
+  return `${whole} = ${wrap} + ${bareLength(zip.edgeMm, units)} + ${wrap}`;
+}
+
+/** The chains once more as sums, for whoever sets out with a rule. */
+function drawSums(
+  sheet: Sheet,
+  pack: SpecPack,
+  cushion: SpecCushion,
+  at: { x: number; y: number; width: number },
+): number {
+  const { units } = pack;
+  const { columnsMm, rowsMm, wall } = cushion.buttons;
+  if (columnsMm.length === 0 || rowsMm.length === 0) return at.y;
+  const step = lengthStep(units);
+  const sum = (stops: readonly number[], whole: number) => {
+    const parts = spaces([0, ...stops, whole], step).map((mm) => bareLength(mm, units));
+    return `${shortSum(parts)} = ${formatLength(whole, { ...units, feet: false })}`;
+  };
+  const seam = cushion.kind === 'seat' ? 'back' : 'top';
+  const lines = [
+    `From the ${cushion.buttons.datumName} seam ${sum(columnsMm, cushion.finished.widthMm)}.`,
+    `Rows from the ${seam} seam ${sum(rowsMm, cushion.finished.depthMm)}.` +
+      (wall
+        ? ` Quiet line: from the ${wall.name}, ${formatLength(wall.gapMm, { ...units, feet: false })} from wall to seam.`
+        : ''),
+  ];
+  sheet.line(at.x, at.y, at.x + at.width, at.y, { pen: PEN.fine });
+  let y = at.y + 4.4;
+  for (const line of lines) y = paragraph(sheet, line, at.x, y, at.width, { size: 9.5 });
+  const foot = y - leading(9.5) + 1.8;
+  sheet.line(at.x, foot, at.x + at.width, foot, { pen: PEN.fine });
+  return foot;
+}
+
+/** "5⅞ + 9¾ + 9¾ + 9¾ + 7⅝", long runs of equals as "12 × 9¾". */
+function shortSum(parts: readonly string[]): string {
+  if (parts.length <= 9) return parts.join(' + ');
+  const groups: { part: string; count: number }[] = [];
+  for (const part of parts) {
+    const last = groups.at(-1);
+    if (last?.part === part) last.count += 1;
+    else groups.push({ part, count: 1 });
+  }
+  return groups.map(({ part, count }) => (count > 1 ? `${count} × ${part}` : part)).join(' + ');
+}
+
+function drawFoot(
+  sheet: Sheet,
+  pack: SpecPack,
+  cushion: SpecCushion,
+  at: { left: number; right: number; top: number; factor: number; scaleWords: string },
+): void {
+  const { units } = pack;
+  sheet.line(at.left, at.top, at.right, at.top, { pen: PEN.fine });
+  const rows = cushion.buttons.rowsMm.length > 0;
+  const words = `Cut ${rows ? 'at a button row' : 'through the middle'}, ${cushion.kind === 'seat' ? 'front at the right, seat not loaded' : 'face up'}`;
+  sheet.text(words, at.left, at.top + 4.6);
+  const barX = at.right - CHECK_BAR_MM;
+  const most = (barX - at.left - 34) / cushion.finished.depthMm;
+  drawCushionCut(
+    sheet,
+    {
+      depthMm: cushion.finished.depthMm,
+      thicknessMm: cushion.finished.thicknessMm,
+      rowsMm: cushion.buttons.rowsMm,
+      foamWords: `foam ${formatLength(cushion.foam.thicknessMm, { ...units, feet: false })}`,
+      groundWords: cushion.kind === 'seat' ? 'deck' : 'back board',
+    },
+    { x: at.left + 4, y: at.top + 9, factor: Math.min(at.factor, most, 14 / cushion.finished.thicknessMm) },
+  );
+  sheet.text(`Scale ${at.scaleWords}. Sizes govern.`, barX, at.top + 4.6, { weight: 600 });
+  drawCheckBar(sheet, barX, at.top + 13);
+  const sink =
+    cushion.kind === 'seat'
+      ? sinkWords(cushion, units)
+      : 'The back cushion is drawn as it is before anybody leans on it.';
+  paragraph(sheet, sink, barX, at.top + 19.2, CHECK_BAR_MM);
+}
+
+function drawFactsColumn(sheet: Sheet, pack: SpecPack, cushion: SpecCushion, frame: Frame): void {
+  const { units } = pack;
+  const x = frame.left + PAD;
+  const width = frame.right - PAD - x;
+  sheet.text('FINISHED, seam to seam', x, frame.top + 5.6);
+  drawHeroSize(sheet, cushion, pack, x, frame.top + 14.6);
+  const tolerance = units.system === 'millimetres' ? '± 6 mm' : '± ¼″';
+  const lead = `${otherSystemWords(cushion.finished, units)}, ${tolerance}. Thickness is the boxing between seams.`;
+  let y = paragraph(sheet, lead, x, frame.top + 20.6, width) - leading(9) + 2.2;
+  y = drawFacts(sheet, factsOf(cushion, pack), { x, y, width, labelWidth: 17 });
+  const floor = frame.bottom - 13;
+  y = drawButtonTable(sheet, cushion, pack, { x, y: y + 2.4, width, floor: floor - 14 });
+  const taken = 'Taken as given: new foam on a flat board. Fit one cushion before cutting the rest.';
+  paragraph(sheet, taken, x, Math.min(y + 4.6, floor - 8), width);
+  const sign = frame.bottom - 8;
+  sheet.line(x, sign, x + width - 32, sign);
+  sheet.line(x + width - 26, sign, x + width, sign);
+  sheet.text('Agreed by', x, sign + 4.2);
+  sheet.text('Date', x + width - 26, sign + 4.2);
+}
+
+function drawHeroSize(sheet: Sheet, cushion: SpecCushion, { units }: SpecPack, x: number, y: number): void {
+  const { widthMm, depthMm, thicknessMm } = cushion.finished;
+  const numbers = [
+    bareLength(widthMm, units),
+    bareLength(depthMm, units),
+    formatLength(thicknessMm, { ...units, feet: false }),
+  ];
+  const width = (size: number) =>
+    numbers.reduce((sum, number) => sum + sheet.textWidth(number, { size, weight: 300 }), 14);
+  const size = [22, 20, 18, 16, 14].find((one) => width(one) <= FACTS_WIDTH_MM - 2 * PAD) ?? 12;
+  let at = x;
+  numbers.forEach((number, index) => {
+    if (index > 0) sheet.text('×', at + 2.2, y, { size: 12, weight: 300 });
+    if (index > 0) at += 7;
+    sheet.text(number, at, y, { size, weight: 300 });
+    at += sheet.textWidth(number, { size, weight: 300 });
+  });
+}
+
+function factsOf(cushion: SpecCushion, pack: SpecPack): Fact[] {
+  const { units, words } = pack;
+  const { zip, boxing, plates, edges } = cushion;
+  const bold = (text: string) => [{ text, weight: 600 as const }];
+  const count = cushion.buttons.columnsMm.length * cushion.buttons.rowsMm.length;
+  const on = cushion.benches.map((bench, i) => `${cushion.marks[i]} for ${bench}`);
+  const make = `${cushion.marks.length}, ${handWords(cushion.hand)}: ${on.slice(0, 6).join(', ')}${on.length > 6 ? ' …' : ''}`;
+  return [
+    { label: 'Make', value: bold(make) },
+    { label: 'Edges', value: bold(`${edges.left} · ${edges.right} · ${edges.front}`) },
+    {
+      label: 'Foam',
+      value: bold(
+        `${sizeWords(cushion.foam, units)}, ${foamWords(cushion, units)}; ${volumeWords(cushion.foamVolumeM3, units)}, ${massWords(cushion.foamMassKg, units)} each`,
+      ),
+    },
+    {
+      label: 'Cut',
+      value: bold(
+        `2 plates ${pairWords(plates.widthMm, plates.depthMm, units)}; boxing ${formatLength(boxing.cutHeightMm, { ...units, feet: false })} wide`,
+      ),
+    },
+    {
+      label: 'Welt',
+      value: bold(
+        `both seams, 2 × ${formatLength(cushion.perimeterMm, { ...units, feet: false })} = ${runWords(cushion.weltMm, units)} with joins`,
+      ),
+    },
+    {
+      label: 'Closure',
+      value: bold(
+        zip
+          ? `Zip ${zipSum(zip, units)}; boxing ${formatLength(boxing.lengthMm, { ...units, feet: false })} makes up ${formatLength(cushion.perimeterMm, { ...units, feet: false })} round`
+          : `Boxing ${formatLength(boxing.lengthMm, { ...units, feet: false })} round`,
+      ),
+    },
+    {
+      label: 'Buttons',
+      value: bold(count > 0 ? `${count}${words.buttons ? `, ${brief(words.buttons)}` : ''}` : 'none'),
+    },
+    ...(words.cover ? [{ label: 'Cover', value: bold(brief(words.cover)) }] : []),
+    ...(words.fixing ? [{ label: 'Fixing', value: bold(brief(words.fixing)) }] : []),
+  ];
+}
+
+/** Long words stand once, on the first sheet. */
+function brief(words: string): string {
+  return words.length <= 90 ? words : 'see sheet 1';
+}
+
+export function headMarks({ marks }: SpecCushion): string {
+  if (marks.length === 1) return marks[0] ?? '';
+  if (marks.length <= 4) return `${marks.slice(0, -1).join(', ')} and ${marks.at(-1)}`;
+  return `${marks[0]} to ${marks.at(-1)} (${marks.length})`;
+}

@@ -1,0 +1,85 @@
+import { formatLength, formatMass, type LengthStyle } from '@settlewright/geometry';
+import { seatSinkMm } from '@settlewright/anthropometry';
+import type { Size, SpecCushion } from './spec-pack';
+
+const KG_M3_PER_LB_FT3 = 16.018463;
+const NEWTON_PER_LBF = 4.4482216;
+const M3_PER_FT3 = 0.0283168466;
+const LIGHT_SITTER = { kg: 49.9, words: '110 to 220\u00a0lb', metric: '50 to 100\u00a0kg' };
+const HEAVY_SITTER_KG = 99.8;
+
+export const isMetric = (units: LengthStyle): boolean => units.system === 'millimetres';
+
+/** Three sizes in a row, the unit once at the end. */
+export function sizeWords({ widthMm, depthMm, thicknessMm }: Size, units: LengthStyle): string {
+  return `${bareLength(widthMm, units)} × ${bareLength(depthMm, units)} × ${formatLength(thicknessMm, units)}`;
+}
+
+export function pairWords(a: number, b: number, units: LengthStyle): string {
+  return `${bareLength(a, units)} × ${formatLength(b, units)}`;
+}
+
+export function bareLength(mm: number, units: LengthStyle): string {
+  return formatLength(mm, { ...units, feet: false }).replace(/[″]|[\s\u00a0\u202f]*mm/g, '');
+}
+
+/** The other system, for a shop that measures in it. */
+export function otherSystemWords(size: Size, units: LengthStyle): string {
+  return sizeWords(
+    size,
+    isMetric(units) ? { system: 'feet-inches', roundTo: 16 } : { system: 'millimetres', roundTo: 16 },
+  );
+}
+
+/** Long lengths of welt and boxing: feet as well where inches rule. */
+export function runWords(mm: number, units: LengthStyle): string {
+  if (units.system !== 'feet-inches') return formatLength(mm, units);
+  return `${formatLength(mm, { ...units, feet: false })} (${formatLength(mm, { ...units, feet: true })})`;
+}
+
+/** Grade with density and firmness: neither is said without the other. */
+export function foamWords({ foamGrade }: Pick<SpecCushion, 'foamGrade'>, units: LengthStyle): string {
+  const { name, densityKgM3, ifd25N } = foamGrade;
+  const density = isMetric(units)
+    ? `${Math.round(densityKgM3)}\u00a0kg/m³`
+    : `${(densityKgM3 / KG_M3_PER_LB_FT3).toFixed(1)}\u00a0lb/ft³`;
+  const firmness = isMetric(units)
+    ? `firmness ${Math.round(ifd25N)}\u00a0N (25\u00a0% IFD)`
+    : `firmness ${Math.round(ifd25N / NEWTON_PER_LBF)}\u00a0lb (25\u00a0% IFD)`;
+  return [name, density, firmness].filter(Boolean).join(', ');
+}
+
+export function volumeWords(m3: number, units: LengthStyle): string {
+  return isMetric(units) ? `${m3.toFixed(3)}\u00a0m³` : `${(m3 / M3_PER_FT3).toFixed(2)}\u00a0ft³`;
+}
+
+export function massWords(kg: number, units: LengthStyle): string {
+  return formatMass(kg, units);
+}
+
+/** How far the seat goes down under a range of sitters, no finer than a quarter of an inch. */
+export function sinkWords(cushion: SpecCushion, units: LengthStyle): string {
+  const { ifd25N, supportFactor } = cushion.foamGrade;
+  const foam = { ifd25N, supportFactor, thicknessMm: cushion.finished.thicknessMm };
+  const light = seatSinkMm(foam, LIGHT_SITTER.kg);
+  const heavy = seatSinkMm(foam, HEAVY_SITTER_KG);
+  const step = isMetric(units) ? 5 : 6.35;
+  const coarse = (mm: number) =>
+    formatLength(Math.max(step, Math.round(mm / step) * step), { ...units, feet: false });
+  const people = isMetric(units) ? LIGHT_SITTER.metric : LIGHT_SITTER.words;
+  const range =
+    coarse(light.sinkMm) === coarse(heavy.sinkMm)
+      ? `about ${coarse(heavy.sinkMm)}`
+      : `${coarse(light.sinkMm)} to ${coarse(heavy.sinkMm)}`;
+  const bottom = heavy.bottomsOut ? ' The heaviest of them would press it to the deck.' : '';
+  return `Sinks ${range} under sitters of ${people}, give or take 30\u00a0%.${bottom}`;
+}
+
+export function handWords(hand: SpecCushion['hand']): string {
+  return hand === 'either' ? 'no hand' : `${hand} hand`;
+}
+
+export function marksWords(marks: readonly string[]): string {
+  if (marks.length <= 6) return marks.join(', ');
+  return `${marks[0]} to ${marks.at(-1)}, ${marks.length} in all`;
+}
