@@ -22,3 +22,18 @@ export * from './pieces/place-frames.ts';
 export * from './pieces/bench-layout.ts';
 export { pressedSeatHeightMm, referenceSinkMm } from './pieces/seat-sink.ts';
 export * from './situation/measure-set.ts';
+export type { FigureMeans } from './mannequin/figure.ts';
+export type { MannequinJoints } from './mannequin/joints.ts';
+export { MANNEQUIN_TAGS, mannequinMesh, type MannequinMesh } from './mannequin/mesh.ts';
+export {
+  poseMannequin,
+  type MannequinPose,
+  type PoseNote,
+  type SeatPoint,
+  type SeatPosture,
+} from './mannequin/pose.ts';
+export type { MannequinSegment, MannequinTag } from './mannequin/segments.ts';
+export * from './drawing/drawing.ts';
+export { planOf, type PlanOptions } from './drawing/plan.ts';
+export { frontOf } from './drawing/front.ts';
+export { sectionOf } from './drawing/section.ts';

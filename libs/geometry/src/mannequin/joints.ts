@@ -5,8 +5,7 @@ import { legLine } from './leg-sections.ts';
 import { HIP_FORWARD_MM, HIP_HEIGHT_MM, leanPoint, mirror, shoulderLineMm, type Stance } from './stance.ts';
 import { add, along, turnAboutX, turnAboutY } from './vector.ts';
 
-const PAIRED = ['shoulder', 'elbow', 'wrist', 'fingertip', 'hip', 'knee', 'ankle', 'heel', 'toe'] as const;
-type Paired = (typeof PAIRED)[number];
+type Paired = 'shoulder' | 'elbow' | 'wrist' | 'fingertip' | 'hip' | 'knee' | 'ankle' | 'heel' | 'toe';
 
 /** Joint centres and landmarks in the room frame; pairs by the sitter's own left and right. */
 export type MannequinJoints = {

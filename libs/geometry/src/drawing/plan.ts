@@ -1,0 +1,179 @@
+import { cushionRuns, cushionRunsOf } from '../cushions/cushion-runs.ts';
+import { toRoom } from '../parts/placement.ts';
+import { benchLayout } from '../pieces/bench-layout.ts';
+import { placeFramesOf } from '../pieces/place-frames.ts';
+import type { Piece, PieceOf, SetDocument } from '../room/document.ts';
+import { footprint } from '../room/footprint.ts';
+import { drawingOf, type Drawing, type DrawShape, type Fill, type PagePoint, type Pen } from './drawing.ts';
+
+/** What a plan shows besides the pieces. */
+export interface PlanOptions {
+  /** Who sits: a circle at each place, in one of six colours. */
+  sitters?: readonly { placeId: string; colour: 1 | 2 | 3 | 4 | 5 | 6 }[];
+  /** Words on the plan: marks of pieces, marks of seat cushions, or none. */
+  marks?: 'none' | 'pieces' | 'cushions';
+  marginMm?: number;
+}
+
+const HEAD_RADIUS_MM = 105;
+/** Pieces lower down are painted first. */
+const PAINTING_ORDER: readonly Piece['kind'][] = [
+  'bulkhead',
+  'sill',
+  'loose-seat',
+  'bench',
+  'table',
+  'overhead',
+];
+
+/** A rectangle of a piece's own frame on the page. */
+function rectangle(piece: Piece, x0: number, x1: number, z0: number, z1: number): PagePoint[] {
+  return (
+    [
+      [x0, z0],
+      [x1, z0],
+      [x1, z1],
+      [x0, z1],
+    ] as const
+  ).map(([x, z]): PagePoint => {
+    const [rx, , rz] = toRoom(piece.at, [x, 0, z]);
+    return [rx, rz];
+  });
+}
+
+const area = (piece: Piece, points: PagePoint[], pen: Pen, fill: Fill, dashed?: true): DrawShape => ({
+  kind: 'polygon',
+  points,
+  pen,
+  fill,
+  pieceId: piece.id,
+  ...(dashed ? { dashed } : {}),
+});
+
+function benchShapes(bench: PieceOf<'bench'>, marks: Map<string, string>): DrawShape[] {
+  const layout = benchLayout(bench);
+  const half = bench.lengthMm / 2;
+  const front = Math.max(layout.frontZMm, layout.deckFrontZMm);
+  const shapes = [area(bench, rectangle(bench, -half, half, 0, front), 'edge', 'oak')];
+  for (const run of cushionRuns(bench)) {
+    const [z0, z1] =
+      run.kind === 'seat' ? [layout.faceZMm, layout.frontZMm] : [bench.backThicknessMm, layout.faceZMm];
+    const mark = marks.get(run.key);
+    shapes.push({
+      ...area(bench, rectangle(bench, run.leftMm, run.rightMm, z0, z1), 'fine', 'cloth'),
+      ...(mark ? { cushionMark: mark } : {}),
+    });
+  }
+  if (layout.hasBack) {
+    shapes.push(area(bench, rectangle(bench, -half, half, 0, bench.backThicknessMm), 'edge', 'oak'));
+  }
+  for (const side of ['left', 'right'] as const) {
+    const { kind, thicknessMm } = bench.ends[side];
+    if (kind === 'open' || thicknessMm === 0) continue;
+    const [x0, x1] = side === 'left' ? [-half, thicknessMm - half] : [half - thicknessMm, half];
+    shapes.push(area(bench, rectangle(bench, x0, x1, 0, front), 'edge', 'oak'));
+  }
+  return shapes;
+}
+
+function sillShapes(sill: PieceOf<'sill'>): DrawShape[] {
+  const half = sill.lengthMm / 2;
+  const shapes = [area(sill, rectangle(sill, -half, half, 0, sill.depthMm), 'edge', 'walnut')];
+  const { widthMm } = sill.opening;
+  if (widthMm > 0) {
+    shapes.push({
+      kind: 'polyline',
+      points: rectangle(sill, -widthMm / 2, widthMm / 2, 0, 0).slice(0, 2),
+      pen: 'outline',
+      pieceId: sill.id,
+    });
+  }
+  return shapes;
+}
+
+function pieceShapes(piece: Piece, marks: Map<string, string>): DrawShape[] {
+  switch (piece.kind) {
+    case 'bench':
+      return benchShapes(piece, marks);
+    case 'sill':
+      return sillShapes(piece);
+    case 'bulkhead':
+      return [area(piece, corners(piece), 'cut', 'wall')];
+    case 'table':
+      return [area(piece, corners(piece), 'edge', 'walnut')];
+    case 'overhead':
+      return [area(piece, corners(piece), 'hair', 'none', true)];
+    case 'loose-seat': {
+      const half = piece.widthMm / 2;
+      const shapes = [area(piece, corners(piece), 'edge', 'oak')];
+      if (piece.seatCushion.thicknessMm > 0) {
+        shapes.push(
+          area(piece, rectangle(piece, -half + 15, half - 15, 15, piece.seatDepthMm - 10), 'fine', 'cloth'),
+        );
+      }
+      return shapes;
+    }
+  }
+}
+
+const corners = (piece: Piece): PagePoint[] => footprint(piece).corners.map(([x, z]): PagePoint => [x, z]);
+
+function middle(points: readonly PagePoint[]): PagePoint {
+  const sum = points.reduce(([x, y], [px, py]): PagePoint => [x + px, y + py], [0, 0]);
+  return [sum[0] / points.length, sum[1] / points.length];
+}
+
+/**
+ * The set seen from above: walls as thick areas, benches with back and cushions, tables, loose seats,
+ * sills with their openings, beams dashed.
+ *
+ * @param document - the set
+ * @param options - sitters and marks to show
+ * @returns page x is the room's x, page y the room's z (towards the viewer), millimetres
+ */
+export function planOf(document: SetDocument, options: PlanOptions = {}): Drawing {
+  const cushionMarks = new Map(
+    cushionRunsOf(document).map((run, i): [string, string] => [run.key, `C${i + 1}`]),
+  );
+  const ordered = PAINTING_ORDER.flatMap((kind) => document.pieces.filter((piece) => piece.kind === kind));
+  const shapes = ordered.flatMap((piece) => pieceShapes(piece, cushionMarks));
+  for (const frame of placeFramesOf(document)) {
+    const sitter = options.sitters?.find(({ placeId }) => placeId === frame.placeId);
+    if (!sitter) continue;
+    shapes.push({
+      kind: 'circle',
+      centre: [frame.hipMm[0], frame.hipMm[2]],
+      radiusMm: HEAD_RADIUS_MM,
+      pen: 'fine',
+      fill: `sitter-${sitter.colour}`,
+      pieceId: frame.pieceId,
+      placeId: frame.placeId,
+    });
+  }
+  if (options.marks === 'pieces') {
+    for (const piece of ordered) {
+      shapes.push({
+        kind: 'text',
+        at: middle(corners(piece)),
+        text: piece.mark,
+        anchor: 'middle',
+        pieceId: piece.id,
+      });
+    }
+  }
+  if (options.marks === 'cushions') {
+    for (const shape of [...shapes]) {
+      if (shape.kind !== 'polygon' || !shape.cushionMark) continue;
+      const { cushionMark, pieceId, points } = shape;
+      shapes.push({
+        kind: 'text',
+        at: middle(points),
+        text: cushionMark,
+        anchor: 'middle',
+        pieceId,
+        cushionMark,
+      });
+    }
+  }
+  return drawingOf(shapes, options.marginMm ?? 0);
+}
