@@ -46,7 +46,8 @@ export interface Workshop {
 export interface Member {
   userId: string;
   name: string;
-  email: string;
+  /** Only the owner receives it. */
+  email?: string;
   role: Role;
   joinedAt: string;
 }
@@ -62,10 +63,12 @@ export interface Invitation {
 /** What the holder of an invitation sees before joining. */
 export interface InvitationOffer {
   workshopName: string;
+  invitedByName: string;
   email: string;
   role: Role;
-  invitedBy: string;
-  hasAccount: boolean;
+  expiresAt: string;
+  /** True: the password of that account is asked; false: a name and a new password. */
+  accountExists: boolean;
 }
 
 export interface Upholsterer {
@@ -84,8 +87,7 @@ export interface Production {
   units: UnitSystem;
   roundTo: RoundTo;
   status: 'active' | 'archived';
-  setCount?: number;
-  castCount?: number;
+  createdAt: string;
   updatedAt: string;
 }
 
@@ -102,14 +104,16 @@ export interface CastMember {
   role: string;
   colour: number;
   bodyData?: BodyData;
-  statureMm?: number | null;
-  statureSource?: 'measured' | 'told' | null;
-  weightKg?: number | null;
+  statureMm?: number;
+  statureSource?: 'measured' | 'told';
+  weightKg?: number;
   measured?: Partial<Record<TapeMeasureKey, TapeReading>>;
   shoeMm?: number;
   clothing?: Clothing;
   notes?: string;
   createdAt?: string;
+  /** The person was erased and still holds a place in a draft. */
+  removed?: boolean;
 }
 
 export interface ImportProblem {
@@ -119,22 +123,42 @@ export interface ImportProblem {
   message: string;
 }
 
+export interface ImportRow {
+  /** Line of the file; the header stands on line 1. */
+  line: number;
+  /** Absent when the row cannot be taken. */
+  value?: Pick<CastMember, 'name' | 'role' | 'statureMm' | 'statureSource' | 'weightKg' | 'measured'>;
+  problems: ImportProblem[];
+  /** Worth a look; the row is taken all the same. */
+  warnings: ImportProblem[];
+}
+
 export interface ImportPreview {
-  columns: string[];
+  columns: { header: string; key: string; unit?: string }[];
+  rows: ImportRow[];
   ignoredColumns: string[];
-  rows: { line: number; value?: Partial<CastMember> | null; problems: ImportProblem[] }[];
+}
+
+export interface RevisionSummary {
+  letter: string;
+  number: number;
+  issuedAt: string;
+  note: string;
+  approval?: { decision: 'approved' | 'changes-wanted' };
 }
 
 export interface SetSummary {
   id: string;
   name: string;
+  status: 'active' | 'archived';
   draftNumber: number;
-  status?: 'active' | 'archived';
-  lastRevision?: { letter: string; issuedAt: string; approved?: boolean } | null;
+  savedAt: string;
+  lastRevision?: RevisionSummary;
   pieceCount: number;
   seatedCount: number;
-  counts?: Record<Verdict, number> | null;
-  document?: SetDocument | null;
+  /** Verdicts of the draft; absent when they could not be made. */
+  counts?: Record<Verdict, number>;
+  document: SetDocument;
 }
 
 export type OrderState =
@@ -151,15 +175,17 @@ export type OrderState =
 
 export interface OrderSummary {
   id: string;
-  number?: number;
+  number: number;
   title: string;
   state: OrderState;
   setId: string;
+  setName: string;
   revisionLetter: string;
-  neededBy?: string | null;
-  upholstererName?: string | null;
-  openQuestions?: number;
-  updatedAt?: string;
+  neededBy: string | null;
+  cushionCount: number;
+  upholsterer: { id: string; name: string; contactName: string } | null;
+  openQuestions: number;
+  updatedAt: string;
 }
 
 export interface Draft {

@@ -1,0 +1,50 @@
+import { toast } from 'sonner';
+import { FormDialog } from '@/components/dialog.tsx';
+import type { CastMember } from '@/lib/contract.ts';
+import { sayProblem } from '@/lib/problem.ts';
+import { type CastPlace, useErase } from '../api.ts';
+
+interface EraseDialogProps {
+  place: CastPlace;
+  person: CastMember | null;
+  onClose: () => void;
+}
+
+export function EraseDialog({ place, person, onClose }: EraseDialogProps) {
+  const erase = useErase(place);
+  return (
+    <FormDialog
+      open={person !== null}
+      onClose={onClose}
+      title={`Erase ${person?.name ?? ''}?`}
+      describe={
+        <>
+          <p>
+            Name, measures and notes go for good, from drafts, issued revisions, fit sheets and stored papers
+            too.
+          </p>
+          <p className="mt-2">
+            Where they sat stands “removed sitter”; the verdicts stay. This cannot be undone. Export them
+            first if they ask for what is held.
+          </p>
+        </>
+      }
+      verb="Erase"
+      busyWords="Erasing"
+      busy={erase.isPending}
+      problem={erase.isError ? sayProblem(erase.error) : null}
+      onSubmit={(event) => {
+        event.preventDefault();
+        if (person === null) return;
+        erase.mutate(person.id, {
+          onSuccess: () => {
+            toast(`${person.name} erased.`);
+            onClose();
+          },
+        });
+      }}
+    >
+      {null}
+    </FormDialog>
+  );
+}

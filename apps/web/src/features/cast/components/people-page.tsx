@@ -1,0 +1,254 @@
+import { useMemo, useState } from 'react';
+import { useSearchParams } from 'react-router-dom';
+import { toast } from 'sonner';
+import { Button } from '@/components/button.tsx';
+import { type DataColumn, DataTable } from '@/components/data-table.tsx';
+import { DashedList, EmptyState } from '@/components/empty-state.tsx';
+import { AddIcon, MoreIcon } from '@/components/icons.tsx';
+import { Length } from '@/components/length.tsx';
+import { PaleBars } from '@/components/loading.tsx';
+import { Menu } from '@/components/menu.tsx';
+import { Notice } from '@/components/notice.tsx';
+import { PageHeading } from '@/components/page-heading.tsx';
+import type { CastMember } from '@/lib/contract.ts';
+import { download } from '@/lib/download.ts';
+import { type Format, useFormat } from '@/lib/format.ts';
+import { usePageTitle } from '@/lib/page-title.ts';
+import { sayProblem } from '@/lib/problem.ts';
+import { useProduction } from '@/lib/production.ts';
+import { useWorkshop } from '@/lib/workshop.ts';
+import { type CastPlace, csvPath, exportPath, useCast } from '../api.ts';
+import { knownBy } from '../known-by.ts';
+import { EraseDialog } from './erase-dialog.tsx';
+import { ImportDialog } from './import-dialog.tsx';
+import { MannequinNote } from './mannequin-note.tsx';
+import { PersonDialog } from './person-dialog.tsx';
+import { PersonName } from './person-name.tsx';
+
+const fetchFile = (path: string) => {
+  download(path).catch((error: unknown) => toast(sayProblem(error)));
+};
+
+const nameColumn: DataColumn<CastMember> = {
+  id: 'name',
+  header: 'Name',
+  value: (person) => `${person.name} ${person.role}`,
+  cell: (person) => <PersonName person={person} />,
+};
+
+function measureColumns(format: Format): DataColumn<CastMember>[] {
+  return [
+    {
+      id: 'height',
+      header: 'Height',
+      align: 'right',
+      value: (person) => person.statureMm,
+      cell: (person) =>
+        person.statureMm === undefined ? (
+          <span className="text-ink-3">not known</span>
+        ) : (
+          <span className={person.statureSource === 'measured' ? 'font-semibold' : undefined}>
+            <Length mm={person.statureMm} feet />
+            {person.statureSource === 'told' && <span className="text-sm text-ink-2">, told</span>}
+          </span>
+        ),
+    },
+    {
+      id: 'weight',
+      header: 'Weight',
+      align: 'right',
+      value: (person) => person.weightKg,
+      cell: (person) =>
+        person.weightKg === undefined ? (
+          <span className="text-ink-3">not known</span>
+        ) : (
+          format.mass(person.weightKg)
+        ),
+    },
+    {
+      id: 'shoe',
+      header: 'Shoe',
+      align: 'right',
+      quietOnPhone: true,
+      value: (person) => person.shoeMm,
+      cell: (person) => (person.shoeMm === undefined ? '' : <Length mm={person.shoeMm} />),
+    },
+    {
+      id: 'known',
+      header: 'Known by',
+      value: (person) => knownBy(person).words,
+      cell: (person) => <span className="text-sm text-ink-2">{knownBy(person).words}</span>,
+    },
+  ];
+}
+
+interface RowMenuProps {
+  place: CastPlace;
+  person: CastMember;
+  onEdit: () => void;
+  onErase: () => void;
+}
+
+function RowMenu({ place, person, onEdit, onErase }: RowMenuProps) {
+  if (person.removed) return null;
+  return (
+    <span className="flex items-center justify-end gap-4">
+      <Button look="word" onClick={onEdit}>
+        Edit<span className="sr-only"> {person.name}</span>
+      </Button>
+      <Menu
+        name={`More for ${person.name}`}
+        button={<MoreIcon />}
+        buttonClassName="quick flex size-9 items-center justify-center rounded-sm hover:bg-sunk data-open:bg-chalk-wash"
+        side="end"
+        entries={[
+          {
+            id: 'export',
+            words: 'Export what is held',
+            onPress: () => fetchFile(exportPath(place, person.id)),
+          },
+          { id: 'erase', words: 'Erase', onPress: onErase },
+        ]}
+      />
+    </span>
+  );
+}
+
+export function PeoplePage() {
+  const workshop = useWorkshop();
+  const production = useProduction();
+  usePageTitle(`People, ${production.name}`);
+  const format = useFormat();
+  const place = useMemo(
+    () => ({ workshopId: workshop.id, productionId: production.id }),
+    [workshop.id, production.id],
+  );
+  const cast = useCast(place);
+  const [search, setSearch] = useSearchParams();
+  const adding = search.get('add') === '1' && workshop.canEdit;
+  const [edited, setEdited] = useState<CastMember | null>(null);
+  const [erased, setErased] = useState<CastMember | null>(null);
+  const [importing, setImporting] = useState(false);
+  const people = cast.data?.items ?? [];
+  const add = () => setSearch({ add: '1' });
+
+  const columns = useMemo<DataColumn<CastMember>[]>(() => {
+    if (!workshop.canEdit) {
+      return [
+        {
+          ...nameColumn,
+          value: (person) => person.name,
+          cell: (person) => <PersonName person={{ ...person, role: '' }} />,
+        },
+        { id: 'part', header: 'Part', value: (person) => person.role, cell: (person) => person.role },
+      ];
+    }
+    return [
+      nameColumn,
+      ...measureColumns(format),
+      {
+        id: 'actions',
+        header: '',
+        sortable: false,
+        align: 'right',
+        value: () => undefined,
+        cell: (person) => (
+          <RowMenu
+            place={place}
+            person={person}
+            onEdit={() => setEdited(person)}
+            onErase={() => setErased(person)}
+          />
+        ),
+      },
+    ];
+  }, [workshop.canEdit, format, place]);
+
+  return (
+    <div className="page">
+      <PageHeading
+        above={production.name}
+        title="People"
+        actions={
+          workshop.canEdit && (
+            <>
+              <Button onClick={() => setImporting(true)}>Add from a table</Button>
+              <Button look="main" icon={<AddIcon />} onClick={add}>
+                Add a person
+              </Button>
+            </>
+          )
+        }
+      />
+      <div className="ruled pt-4">
+        {cast.isPending && <PaleBars words="Loading people" rows={6} />}
+        {cast.isError && (
+          <Notice tone="wont" title="The people could not be fetched">
+            {sayProblem(cast.error)}
+          </Notice>
+        )}
+        {cast.isSuccess && people.length === 0 && (
+          <EmptyState
+            title="Nobody yet"
+            drawing={<DashedList />}
+            actions={
+              workshop.canEdit && (
+                <Button look="main" onClick={add}>
+                  Add a person
+                </Button>
+              )
+            }
+          >
+            A name and a height are enough to begin with; what is measured later makes the verdicts firm.
+          </EmptyState>
+        )}
+        {people.length > 0 && (
+          <DataTable
+            caption="People of this production"
+            rows={people}
+            columns={columns}
+            rowKey={(person) => person.id}
+            filterLabel="Find a person"
+            nothingFound="Nobody goes by that name."
+            tools={
+              workshop.canEdit && (
+                <Button look="word" onClick={() => fetchFile(csvPath(place))}>
+                  All as a table (CSV)
+                </Button>
+              )
+            }
+          />
+        )}
+      </div>
+      <div className="mt-8 grid gap-x-14 gap-y-6 desk:grid-cols-2">
+        <MannequinNote />
+        <section className="ruled pt-2">
+          <h2 className="font-semibold">Who sees what</h2>
+          <p className="mt-1 max-w-text text-sm text-ink-2">
+            {workshop.canEdit
+              ? 'Owner and designers see these measures. Carpenters and reviewers see names, verdicts and margins; the upholsterer never sees people.'
+              : 'Heights, weights and measures are personal. As a ' +
+                workshop.role +
+                ' you see names here, and verdicts and margins on the fit sheet.'}
+          </p>
+        </section>
+      </div>
+      {workshop.canEdit && (
+        <>
+          <PersonDialog
+            key={edited?.id ?? 'new'}
+            place={place}
+            person={edited}
+            open={adding || edited !== null}
+            onClose={() => {
+              setEdited(null);
+              if (adding) setSearch({}, { replace: true });
+            }}
+          />
+          <ImportDialog place={place} open={importing} onClose={() => setImporting(false)} />
+          <EraseDialog place={place} person={erased} onClose={() => setErased(null)} />
+        </>
+      )}
+    </div>
+  );
+}

@@ -1,0 +1,47 @@
+import type { PieceKind, SetDocument } from '@settlewright/geometry';
+
+const NUMBERS = [
+  'no',
+  'one',
+  'two',
+  'three',
+  'four',
+  'five',
+  'six',
+  'seven',
+  'eight',
+  'nine',
+  'ten',
+  'eleven',
+  'twelve',
+];
+
+/** "four", or "13" from there on. */
+export function numberWord(count: number): string {
+  return NUMBERS[count] ?? String(count);
+}
+
+const KINDS: readonly { kind: PieceKind; one: string; many: string }[] = [
+  { kind: 'bench', one: 'bench', many: 'benches' },
+  { kind: 'table', one: 'table', many: 'tables' },
+  { kind: 'loose-seat', one: 'chair', many: 'chairs' },
+  { kind: 'sill', one: 'sill', many: 'sills' },
+  { kind: 'overhead', one: 'beam', many: 'beams' },
+];
+
+const capital = (text: string) => text.charAt(0).toUpperCase() + text.slice(1);
+
+/** What stands in a set, in one sentence: "Four benches, two tables, a sill; six people, 45 checks". */
+export function describeSet(document: SetDocument, seated: number, checks: number): string {
+  const pieces = KINDS.map(({ kind, one, many }) => {
+    const count = document.pieces.filter((piece) => piece.kind === kind).length;
+    if (count === 0) return null;
+    return count === 1 ? `a ${one}` : `${numberWord(count)} ${many}`;
+  }).filter((words) => words !== null);
+  if (pieces.length === 0) return 'Nothing on the floor yet';
+  const people =
+    seated === 0
+      ? 'nobody seated yet'
+      : `${numberWord(seated)} ${seated === 1 ? 'person' : 'people'}, ${checks} checks`;
+  return `${capital(pieces.join(', '))}; ${people}`;
+}

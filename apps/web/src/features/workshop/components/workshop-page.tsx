@@ -1,0 +1,34 @@
+import { Notice } from '@/components/notice.tsx';
+import { PageHeading } from '@/components/page-heading.tsx';
+import { PaleBars } from '@/components/loading.tsx';
+import { RuleHeading } from '@/components/rule-heading.tsx';
+import { usePageTitle } from '@/lib/page-title.ts';
+import { sayProblem } from '@/lib/problem.ts';
+import { useWorkshop } from '@/lib/workshop.ts';
+import { useWorkshopSettings } from '../api.ts';
+import { Members } from './members.tsx';
+import { SettingsForm } from './settings-form.tsx';
+import { Upholsterers } from './upholsterers.tsx';
+
+export function WorkshopPage() {
+  const workshop = useWorkshop();
+  usePageTitle(`Workshop, ${workshop.name}`);
+  const settings = useWorkshopSettings(workshop.id);
+  return (
+    <div className="page">
+      <PageHeading above="Workshop" title={workshop.name} />
+      <div className="grid items-start gap-x-14 gap-y-10 desk:grid-cols-[1fr_26rem]">
+        <div className="grid gap-10">
+          <Members workshop={workshop} />
+          <Upholsterers workshop={workshop} />
+        </div>
+        <section>
+          <RuleHeading className="mb-4">Title block and paper</RuleHeading>
+          {settings.isPending && <PaleBars words="Loading the workshop" />}
+          {settings.isError && <Notice tone="wont">{sayProblem(settings.error)}</Notice>}
+          {settings.data && <SettingsForm workshop={settings.data} canChange={workshop.isOwner} />}
+        </section>
+      </div>
+    </div>
+  );
+}

@@ -1,0 +1,1 @@
+export { AccountPage as Component } from '@/features/auth/components/account-page.tsx';

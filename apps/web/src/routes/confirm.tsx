@@ -1,0 +1,1 @@
+export { ConfirmPage as Component } from '@/features/auth/components/confirm-page.tsx';

@@ -1,0 +1,1 @@
+export { Entrance as Component } from '@/features/auth/components/entrance.tsx';

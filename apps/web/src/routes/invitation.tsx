@@ -1,0 +1,1 @@
+export { InvitationPage as Component } from '@/features/auth/components/invitation-page.tsx';

@@ -1,0 +1,25 @@
+import { useCallback } from 'react';
+import { useCast } from '@/features/cast/api.ts';
+import { PeopleSummary } from '@/features/cast/components/people-summary.tsx';
+import { ProductionPage } from '@/features/productions/components/production-page.tsx';
+import type { ColourOf } from '@/features/productions/components/sets.tsx';
+import { useProduction } from '@/lib/production.ts';
+import { useWorkshop } from '@/lib/workshop.ts';
+
+const COLOURS = [1, 2, 3, 4, 5, 6] as const;
+
+/** Sets, people and orders come from features that do not know each other; here they meet. */
+export function Component() {
+  const workshop = useWorkshop();
+  const production = useProduction();
+  const cast = useCast({ workshopId: workshop.id, productionId: production.id });
+  const people = cast.data?.items;
+  const colourOf = useCallback<ColourOf>(
+    (castId) => {
+      const person = people?.find((candidate) => candidate.id === castId);
+      return COLOURS.find((colour) => colour === person?.colour);
+    },
+    [people],
+  );
+  return <ProductionPage colourOf={colourOf} people={<PeopleSummary />} />;
+}

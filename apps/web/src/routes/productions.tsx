@@ -1,0 +1,1 @@
+export { ProductionsPage as Component } from '@/features/productions/components/productions-page.tsx';

@@ -1,0 +1,1 @@
+export { ResetPasswordPage as Component } from '@/features/auth/components/reset-password-page.tsx';

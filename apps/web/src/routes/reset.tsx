@@ -1,0 +1,1 @@
+export { ResetPage as Component } from '@/features/auth/components/reset-page.tsx';

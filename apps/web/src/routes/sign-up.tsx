@@ -1,0 +1,1 @@
+export { SignUpPage as Component } from '@/features/auth/components/sign-up-page.tsx';

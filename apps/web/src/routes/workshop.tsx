@@ -1,0 +1,1 @@
+export { WorkshopPage as Component } from '@/features/workshop/components/workshop-page.tsx';
