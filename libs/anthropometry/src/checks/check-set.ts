@@ -152,7 +152,7 @@ function cellPieces(
 
 /** The public: each rule at the end of the population it protects, at the place where that is worst. */
 function publicRowOf(input: CheckInput): PublicRow {
-  const { ruleBook, situation } = input;
+  const { ruleBook } = input;
   const cells = PERSON_CHECKS.map((check) => {
     const personal = ruleBook.rule(check.id);
     const rule = personal.publicRule ? ruleBook.rule(personal.publicRule) : personal;

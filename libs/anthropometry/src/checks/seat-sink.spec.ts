@@ -1,0 +1,40 @@
+import { describe, expect, it } from 'vitest';
+import { seatSinkMm } from './seat-sink.ts';
+
+const IN = 25.4;
+const LB = 0.45359237;
+const LBF = 4.4482216152605;
+const foam = (ifdPounds: number, supportFactor: number, thicknessIn = 4) => ({
+  thicknessMm: thicknessIn * IN,
+  ifd25N: ifdPounds * LBF,
+  supportFactor,
+});
+
+describe('seatSinkMm', () => {
+  // Worked by hand in pounds and inches from the stress-strain line, foam 4 in thick.
+  it.each([
+    [170, 36, 2.0, 0.319, 1.28],
+    [140, 36, 2.0, 0.241, 0.97],
+    [110, 36, 2.0, 0.19, 0.76],
+    [200, 36, 2.0, 0.402, 1.61],
+    [250, 36, 2.4, 0.457, 1.83],
+    [170, 50, 2.2, 0.211, 0.84],
+    [200, 30, 2.0, 0.512, 2.05],
+  ])('%d lb on IFD %d, support factor %f', (pounds, ifd, factor, strain, sinkIn) => {
+    const sink = seatSinkMm(foam(ifd, factor), pounds * LB);
+    expect(sink.strain).toBeCloseTo(strain, 2);
+    expect(sink.sinkMm / IN).toBeCloseTo(sinkIn, 2);
+    expect(sink.bottomsOut).toBe(false);
+  });
+
+  it('grows with the thickness', () => {
+    const four = seatSinkMm(foam(36, 2), 77).sinkMm;
+    expect(seatSinkMm(foam(36, 2, 5), 77).sinkMm).toBeCloseTo(1.25 * four, 9);
+  });
+
+  it('stops at 65 in 100 and says so when the foam bottoms out', () => {
+    const sink = seatSinkMm(foam(20, 1.5), 160);
+    expect(sink.bottomsOut).toBe(true);
+    expect(sink.strain).toBe(0.65);
+  });
+});
