@@ -1,5 +1,6 @@
 import type { z } from 'zod';
 import { pieceSchema, type Piece, type PieceKind, type SetDocument } from '../room/document.ts';
+import { withPath } from '../room/leaves.ts';
 import { withoutLostSeats } from '../room/seating.ts';
 import { fail, ok, type Result } from '../units/result.ts';
 import type { Parameter, ParameterSpec } from './kind.ts';
@@ -80,7 +81,8 @@ export function setParameter(
   if (refused !== undefined) {
     return fail({ key, label: now.label, value, min: now.min, max: now.max, message: refused });
   }
-  const changed = spec.write === undefined ? withPath(piece, key, value) : spec.write(piece, value);
+  const exact = typeof value === 'number' ? Math.min(now.max, Math.max(now.min, value)) : value;
+  const changed = spec.write === undefined ? withPath(piece, key, exact) : spec.write(piece, exact);
   const parsed = pieceSchema.safeParse(changed);
   if (!parsed.success) {
     const message = `${now.label}: ${value} does not go with the rest of ${piece.mark}.`;
@@ -138,12 +140,6 @@ function readPath(piece: Piece, path: string): number | string {
   let value: unknown = piece;
   for (const key of path.split('.')) value = (value as Record<string, unknown>)[key];
   return value as number | string;
-}
-
-function withPath<T>(holder: T, path: string, value: unknown): T {
-  const [key = '', ...rest] = path.split('.');
-  const inner = (holder as Record<string, unknown>)[key];
-  return { ...holder, [key]: rest.length === 0 ? value : withPath(inner, rest.join('.'), value) };
 }
 
 const limitsByPath = new Map<string, { min: number; max: number } | undefined>();

@@ -1,0 +1,193 @@
+import { parametersOf } from '../pieces/parameters.ts';
+import type { Piece, SetDocument } from './document.ts';
+import { isSame, leavesOf } from './leaves.ts';
+
+/** One point at which two versions of a set differ. A value that is absent is `undefined`. */
+export interface DocumentDifference {
+  /** Stable while the three versions stay the same. */
+  id: string;
+  kind: 'parameter' | 'piece' | 'seating' | 'asked' | 'known-difference';
+  pieceId?: string;
+  mark?: string;
+  /** Path of the parameter in its piece. */
+  key?: string;
+  label: string;
+  base: unknown;
+  mine: unknown;
+  theirs: unknown;
+  changedBy: 'mine' | 'theirs' | 'both';
+  /** True when both sides changed it to different values, so that somebody must choose. */
+  conflict: boolean;
+}
+
+const LABELS: Record<string, string> = {
+  at: 'Position',
+  mark: 'Mark',
+  name: 'Name',
+  note: 'Note',
+  accessible: 'Accessible',
+  locked: 'Locked',
+  places: 'Places',
+  base: 'Base',
+  'seatCushion.foam': 'Seat foam',
+  'backCushion.foam': 'Back foam',
+  'upholstery.buttons': 'Buttons',
+};
+
+const ASKED_LABELS: Record<string, string> = {
+  backPosture: 'Posture',
+  trafficBehind: 'Who passes behind seats',
+};
+
+/**
+ * Compares two versions of a set that grew from one, value by value.
+ *
+ * @param base - the version both started from; null when it is lost, and then every difference is a conflict
+ * @param mine - one version
+ * @param theirs - the other version
+ * @returns every point at which `mine` and `theirs` differ, pieces first; empty when they are the same
+ */
+export function diffDocuments(
+  base: SetDocument | null,
+  mine: SetDocument,
+  theirs: SetDocument,
+): DocumentDifference[] {
+  return [
+    ...pieceDifferences(base, mine, theirs),
+    ...seatingDifferences(base, mine, theirs),
+    ...askedDifferences(base, mine, theirs),
+    ...noteDifferences(base, mine, theirs),
+  ];
+}
+
+type Named = Omit<DocumentDifference, 'base' | 'mine' | 'theirs' | 'changedBy' | 'conflict'>;
+
+/** The difference between two values, or none; `known` is false when the common version is lost. */
+function compared(
+  named: Named,
+  values: { base: unknown; mine: unknown; theirs: unknown },
+  known: boolean,
+): DocumentDifference[] {
+  if (isSame(values.mine, values.theirs)) return [];
+  const changedBy =
+    known && isSame(values.base, values.theirs)
+      ? 'mine'
+      : known && isSame(values.base, values.mine)
+        ? 'theirs'
+        : 'both';
+  return [{ ...named, ...values, changedBy, conflict: changedBy === 'both' }];
+}
+
+function pieceDifferences(
+  base: SetDocument | null,
+  mine: SetDocument,
+  theirs: SetDocument,
+): DocumentDifference[] {
+  const find = (document: SetDocument | null, id: string) =>
+    document?.pieces.find((piece) => piece.id === id);
+  const ids = new Set([...theirs.pieces, ...mine.pieces].map((piece) => piece.id));
+  return [...ids].flatMap((id) => {
+    const values = { base: find(base, id), mine: find(mine, id), theirs: find(theirs, id) };
+    const { mine: own, theirs: other } = values;
+    const shown = own ?? other;
+    if (shown === undefined) return [];
+    const sameKind = own !== undefined && other !== undefined && own.kind === other.kind;
+    // Two pieces that were added on both sides under one id are two pieces: both are kept.
+    const bothAdded = base !== null && values.base === undefined && own !== undefined && other !== undefined;
+    if (sameKind && !bothAdded) return parameterDifferences(values.base, own, other, base !== null);
+    if (bothAdded && isSame(own, other)) return [];
+    const named: Named = {
+      id: `piece:${id}`,
+      kind: 'piece',
+      pieceId: id,
+      mark: shown.mark,
+      label: shown.mark,
+    };
+    if (bothAdded) return [{ ...named, ...values, changedBy: 'both', conflict: false }];
+    // With the common version lost, a piece on one side only may be new or removed: somebody must say.
+    return compared(named, values, base !== null);
+  });
+}
+
+function parameterDifferences(
+  base: Piece | undefined,
+  mine: Piece,
+  theirs: Piece,
+  known: boolean,
+): DocumentDifference[] {
+  const [was, own, other] = [leavesOf(base), leavesOf(mine), leavesOf(theirs)];
+  const labels = new Map(
+    [...parametersOf(theirs), ...parametersOf(mine)].map(({ key, label }) => [key, label]),
+  );
+  return [...new Set([...own.keys(), ...other.keys()])].flatMap((key) =>
+    compared(
+      {
+        id: `piece:${mine.id}:${key}`,
+        kind: 'parameter',
+        pieceId: mine.id,
+        mark: mine.mark,
+        key,
+        label: LABELS[key] ?? labels.get(key) ?? key,
+      },
+      { base: was.get(key), mine: own.get(key), theirs: other.get(key) },
+      known && base !== undefined,
+    ),
+  );
+}
+
+function seatingDifferences(
+  base: SetDocument | null,
+  mine: SetDocument,
+  theirs: SetDocument,
+): DocumentDifference[] {
+  const byPlace = (document: SetDocument | null) =>
+    new Map((document?.seating ?? []).map((seat) => [`${seat.pieceId}:${seat.place}`, seat]));
+  const [was, own, other] = [byPlace(base), byPlace(mine), byPlace(theirs)];
+  const markOf = (id: string) =>
+    [...mine.pieces, ...theirs.pieces].find((piece) => piece.id === id)?.mark ?? id;
+  return [...new Set([...other.keys(), ...own.keys()])].flatMap((where) => {
+    const seat = own.get(where) ?? other.get(where);
+    if (seat === undefined) return [];
+    const mark = markOf(seat.pieceId);
+    const named: Named = {
+      id: `seat:${where}`,
+      kind: 'seating',
+      pieceId: seat.pieceId,
+      mark,
+      label: `Place ${seat.place} of ${mark}`,
+    };
+    const sitter = (seats: typeof own) => seats.get(where)?.sitter;
+    return compared(named, { base: sitter(was), mine: sitter(own), theirs: sitter(other) }, base !== null);
+  });
+}
+
+function askedDifferences(
+  base: SetDocument | null,
+  mine: SetDocument,
+  theirs: SetDocument,
+): DocumentDifference[] {
+  return (Object.keys(mine.asked) as (keyof SetDocument['asked'])[]).flatMap((key) =>
+    compared(
+      { id: `asked:${key}`, kind: 'asked', key, label: ASKED_LABELS[key] ?? key },
+      { base: base?.asked[key], mine: mine.asked[key], theirs: theirs.asked[key] },
+      base !== null,
+    ),
+  );
+}
+
+function noteDifferences(
+  base: SetDocument | null,
+  mine: SetDocument,
+  theirs: SetDocument,
+): DocumentDifference[] {
+  const text = (document: SetDocument | null, id: string) =>
+    document?.knownDifferences.find((note) => note.id === id)?.text;
+  const ids = new Set([...theirs.knownDifferences, ...mine.knownDifferences].map(({ id }) => id));
+  return [...ids].flatMap((id) =>
+    compared(
+      { id: `note:${id}`, kind: 'known-difference', key: id, label: 'Known difference' },
+      { base: text(base, id), mine: text(mine, id), theirs: text(theirs, id) },
+      base !== null,
+    ),
+  );
+}

@@ -1,0 +1,146 @@
+import { fail, ok, type Result } from '../units/result.ts';
+import { diffDocuments, type DocumentDifference } from './diff-documents.ts';
+import type { Piece, SetDocument, SitterRef } from './document.ts';
+import { freeId, nextMark } from './edit-pieces.ts';
+import { withPath } from './leaves.ts';
+import { readSetDocument, type DocumentFieldError } from './read-document.ts';
+import { withoutLostSeats } from './seating.ts';
+
+/** Somebody who has no place in a merged set. */
+export interface Unseated {
+  pieceId: string;
+  place: number;
+  sitter: SitterRef;
+}
+
+/** Two versions brought together, and what that did to people and marks. */
+export interface Merge {
+  document: SetDocument;
+  /** Whose place is gone, or who would have sat at two places; to be shown, never dropped unseen. */
+  unseated: Unseated[];
+  /** Pieces added on both sides under one mark: mine got the next free one. */
+  remarked: { pieceId: string; from: string; to: string }[];
+}
+
+/** Why two versions could not be brought together. */
+export interface MergeError {
+  code: 'undecided' | 'invalid';
+  message: string;
+  /** Ids of the differences that still need a choice. */
+  undecided: string[];
+  fields: DocumentFieldError[];
+}
+
+/**
+ * Brings two versions of a set together: what one side changed is kept, what both changed is chosen.
+ *
+ * @param base - the version both started from; null when it is lost
+ * @param mine - one version
+ * @param theirs - the other version
+ * @param choices - for each conflict of `diffDocuments` by id, whose value to take; may also overrule a change of one side
+ * @returns the merged set, or the ids that still need a choice; nothing is chosen by itself
+ */
+export function mergeDocuments(
+  base: SetDocument | null,
+  mine: SetDocument,
+  theirs: SetDocument,
+  choices: Readonly<Record<string, 'mine' | 'theirs'>>,
+): Result<Merge, MergeError> {
+  const differences = diffDocuments(base, mine, theirs);
+  const undecided = differences.filter(({ id, conflict }) => conflict && choices[id] === undefined);
+  if (undecided.length > 0) {
+    const words = undecided.map(({ mark, label }) => (mark === undefined ? label : `${mark}: ${label}`));
+    return fail({
+      code: 'undecided',
+      message: `Both sides changed: ${words.join(', ')}. Choose one of each.`,
+      undecided: undecided.map(({ id }) => id),
+      fields: [],
+    });
+  }
+  const taken = differences.filter(({ id, changedBy }) => (choices[id] ?? changedBy) !== 'theirs');
+  const applied = taken.reduce((merged, difference) => withMine(merged, difference), theirs);
+  const { document, remarked } = withFreeMarks(applied, mine, theirs);
+  const { document: seated, unseated } = withEveryoneOnce(document, mine);
+  const read = readSetDocument(seated);
+  if (!read.ok) {
+    const { message, fields } = read.error;
+    return fail({ code: 'invalid', message: `Together they do not go: ${message}`, undecided: [], fields });
+  }
+  return ok({ document: read.value, unseated, remarked });
+}
+
+/** Takes the value of my side at one difference. */
+function withMine(merged: SetDocument, difference: DocumentDifference): SetDocument {
+  const { kind, pieceId = '', key = '', mine } = difference;
+  switch (kind) {
+    case 'parameter': {
+      const pieces = merged.pieces.map((piece) =>
+        piece.id === pieceId ? withPath(piece, key, mine) : piece,
+      );
+      return { ...merged, pieces };
+    }
+    case 'piece':
+      return withMyPiece(merged, pieceId, difference);
+    case 'seating': {
+      const place = Number(difference.id.slice(difference.id.lastIndexOf(':') + 1));
+      const others = merged.seating.filter((seat) => !(seat.pieceId === pieceId && seat.place === place));
+      const sitter = mine as SitterRef | undefined;
+      return { ...merged, seating: sitter === undefined ? others : [...others, { pieceId, place, sitter }] };
+    }
+    case 'asked':
+      return { ...merged, asked: withPath(merged.asked, key, mine) };
+    case 'known-difference': {
+      const others = merged.knownDifferences.filter(({ id }) => id !== key);
+      const text = mine as string | undefined;
+      return { ...merged, knownDifferences: text === undefined ? others : [...others, { id: key, text }] };
+    }
+  }
+}
+
+function withMyPiece(merged: SetDocument, pieceId: string, difference: DocumentDifference): SetDocument {
+  const piece = difference.mine as Piece | undefined;
+  const bothAdded = difference.changedBy === 'both' && !difference.conflict;
+  if (bothAdded && piece !== undefined) {
+    const copy = { ...piece, id: freeId(merged, piece.mark) };
+    return { ...merged, pieces: [...merged.pieces, copy] };
+  }
+  const others = merged.pieces.filter(({ id }) => id !== pieceId);
+  return { ...merged, pieces: piece === undefined ? others : [...others, piece] };
+}
+
+/** Gives the next free mark to pieces of mine whose mark the other side has given as well. */
+function withFreeMarks(
+  merged: SetDocument,
+  mine: SetDocument,
+  theirs: SetDocument,
+): Pick<Merge, 'document' | 'remarked'> {
+  const remarked: Merge['remarked'] = [];
+  let document = merged;
+  for (const piece of merged.pieces) {
+    const twins = document.pieces.filter(({ mark }) => mark === piece.mark);
+    if (twins.length < 2) continue;
+    const own = twins.find(({ id }) => !theirs.pieces.some((other) => other.id === id)) ?? twins.at(-1);
+    if (own === undefined) continue;
+    const to = nextMark({ ...document, pieces: [...document.pieces, ...mine.pieces] }, own.kind);
+    remarked.push({ pieceId: own.id, from: own.mark, to });
+    const pieces = document.pieces.map((one) => (one.id === own.id ? { ...one, mark: to } : one));
+    document = { ...document, pieces };
+  }
+  return { document, remarked };
+}
+
+/** Keeps each person at one place, mine where both sides moved somebody, and reports who lost theirs. */
+function withEveryoneOnce(merged: SetDocument, mine: SetDocument): Pick<Merge, 'document' | 'unseated'> {
+  const isMine = (seat: SetDocument['seating'][number]) =>
+    mine.seating.some((own) => own.pieceId === seat.pieceId && own.place === seat.place);
+  const ordered = [...merged.seating].sort((a, b) => Number(isMine(b)) - Number(isMine(a)));
+  const seen = new Set<string>();
+  const once = ordered.filter(({ sitter }) => {
+    if (sitter.kind !== 'cast') return true;
+    const again = seen.has(sitter.castId);
+    seen.add(sitter.castId);
+    return !again;
+  });
+  const document = withoutLostSeats({ ...merged, seating: once });
+  return { document, unseated: merged.seating.filter((seat) => !document.seating.includes(seat)) };
+}
