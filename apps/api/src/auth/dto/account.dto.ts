@@ -1,6 +1,6 @@
 import { ApiProperty } from '@nestjs/swagger';
 import { IsString, MaxLength } from 'class-validator';
-import { EmailAddress, Line, MailedTokenText, Password } from '../../common/text.decorators';
+import { EmailAddress, Line, MailedTokenText, Password } from '../../common/account-fields';
 
 export class SignUpDto {
   @Line(1, 80)

@@ -1,7 +1,7 @@
 import { ApiProperty, ApiPropertyOptional } from '@nestjs/swagger';
 import { IsIn, IsOptional, IsString, MaxLength } from 'class-validator';
 import { type Role, ROLES } from '../../common/access.decorator';
-import { EmailAddress, Line } from '../../common/text.decorators';
+import { EmailAddress, Line } from '../../common/account-fields';
 
 export class InviteDto {
   @EmailAddress()

@@ -1,7 +1,7 @@
 import { ApiProperty, ApiPropertyOptional } from '@nestjs/swagger';
 import { IsIn, IsOptional, IsTimeZone } from 'class-validator';
 import { type Role, ROLES } from '../../common/access.decorator';
-import { Line } from '../../common/text.decorators';
+import { Line } from '../../common/account-fields';
 import { type Paper, PAPERS } from '../entities/workshop.entity';
 
 export class CreateWorkshopDto {
