@@ -1,3 +1,4 @@
+import { afterAll, beforeAll, beforeEach, describe, expect, it } from '@jest/globals';
 import {
   as,
   createMember,

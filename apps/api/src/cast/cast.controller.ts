@@ -23,8 +23,10 @@ export class CastController {
     @Query() query: PageQuery,
   ): Promise<CastPageDto> {
     const page = await this.cast.list(member, productionId, query);
-    const shown = seesMeasures(member) ? CastMemberDto.of : CastNameDto.of;
-    return { ...page, items: page.items.map((person) => shown(person)) };
+    const items = seesMeasures(member)
+      ? page.items.map((person) => CastMemberDto.of(person))
+      : page.items.map((person) => CastNameDto.of(person));
+    return { ...page, items };
   }
 
   @Post()

@@ -6,11 +6,15 @@ import { type CastPerson, castPerson } from '../cast/known-person';
 import { seesMeasures } from '../cast/sees-measures';
 import type { MemberInfo } from '../common/access.decorator';
 import { FitCheckService } from '../fit-checks/fit-check.service';
-import { verdictsOnly } from '../fit-checks/verdicts-only';
+import type { RoundedBody } from '../fit-checks/rounded-body';
+import { type VerdictSheet, verdictsOnly } from '../fit-checks/verdicts-only';
 import { DraftsService } from './drafts.service';
-import type { FitSheetDto } from './dto/fit-sheet.dto';
 import type { SetDraft } from './entities/set-draft.entity';
 import type { SetRevision } from './entities/set-revision.entity';
+
+/** A sheet as far as its reader may see it. */
+export type SeenSheet =
+  ({ detail: 'full' } & FitSheet) | ({ detail: 'verdicts'; bodies: RoundedBody[] } & VerdictSheet);
 
 @Injectable()
 export class FitSheetsService {
@@ -25,7 +29,7 @@ export class FitSheetsService {
     member: MemberInfo,
     productionId: string,
     setId: string,
-  ): Promise<{ draft: SetDraft; sheet: FitSheet; shown: FitSheetDto }> {
+  ): Promise<{ draft: SetDraft; sheet: FitSheet; shown: SeenSheet }> {
     const draft = await this.drafts.get(member, productionId, setId);
     const people = await this.people(productionId);
     const sheet = this.fit.sheetFor(draft.document, people);
@@ -33,16 +37,11 @@ export class FitSheetsService {
   }
 
   /** The sheet of a revision as it was stored, as far as the caller may see it. */
-  async ofRevision(member: MemberInfo, productionId: string, revision: SetRevision): Promise<FitSheetDto> {
+  async ofRevision(member: MemberInfo, productionId: string, revision: SetRevision): Promise<SeenSheet> {
     return this.shown(member, revision.fitSheet, revision.document, await this.people(productionId));
   }
 
-  private shown(
-    member: MemberInfo,
-    sheet: FitSheet,
-    document: SetDocument,
-    people: CastPerson[],
-  ): FitSheetDto {
+  private shown(member: MemberInfo, sheet: FitSheet, document: SetDocument, people: CastPerson[]): SeenSheet {
     if (seesMeasures(member)) return { detail: 'full', ...sheet };
     return { detail: 'verdicts', ...verdictsOnly(sheet), bodies: this.fit.bodiesFor(document, people) };
   }

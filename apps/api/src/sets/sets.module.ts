@@ -3,6 +3,7 @@ import { TypeOrmModule } from '@nestjs/typeorm';
 import { CastModule } from '../cast/cast.module';
 import { FitChecksModule } from '../fit-checks/fit-checks.module';
 import { ProductionsModule } from '../productions/productions.module';
+import { WorkshopsModule } from '../workshops/workshops.module';
 import { BuiltPartsController } from './built-parts.controller';
 import { BuiltPartsService } from './built-parts.service';
 import { DraftsController } from './drafts.controller';
@@ -13,6 +14,8 @@ import { RevisionApproval } from './entities/revision-approval.entity';
 import { SetDraft } from './entities/set-draft.entity';
 import { SetNote } from './entities/set-note.entity';
 import { SetRevision } from './entities/set-revision.entity';
+import { FitSheetFilesController } from './fit-sheet-files.controller';
+import { FitSheetFilesService } from './fit-sheet-files.service';
 import { FitSheetsService } from './fit-sheets.service';
 import { NotesController } from './notes.controller';
 import { NotesService } from './notes.service';
@@ -28,14 +31,23 @@ import { SetsService } from './sets.service';
     ProductionsModule,
     CastModule,
     FitChecksModule,
+    WorkshopsModule,
   ],
-  controllers: [SetsController, DraftsController, RevisionsController, NotesController, BuiltPartsController],
+  controllers: [
+    SetsController,
+    DraftsController,
+    RevisionsController,
+    FitSheetFilesController,
+    NotesController,
+    BuiltPartsController,
+  ],
   providers: [
     SetAccess,
     SetsService,
     DraftsService,
     RevisionsService,
     FitSheetsService,
+    FitSheetFilesService,
     NotesService,
     BuiltPartsService,
   ],
