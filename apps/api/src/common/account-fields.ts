@@ -15,9 +15,8 @@ export function Line(least: number, most: number, { optional = false } = {}): Pr
 export function EmailAddress(): PropertyDecorator {
   return applyDecorators(
     ApiProperty({ format: 'email', maxLength: 254 }),
-    trimmed,
+    TextField({ max: 254 }),
     IsEmail(),
-    MaxLength(254),
   );
 }
 
