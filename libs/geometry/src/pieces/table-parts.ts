@@ -64,15 +64,26 @@ function frame(
   }
 }
 
-/** Legs, trestles or columns; legs stand inside apron and lip. */
-function base(list: PartList, table: Table, clearMm: number, underside: number): void {
+/**
+ * Middle of a leg from the middle of the table: inset as far as asked, clear of apron and lip, and never so far
+ * that it would meet the leg opposite.
+ */
+function legCentre(half: number, wantedInset: number, clear: number, size: number): number {
+  const inset = Math.min(Math.max(wantedInset, clear), half - size - 1);
+  return half - inset - size / 2;
+}
+
+/** Legs, trestles or columns; they stand inside apron and lip. */
+function base(list: PartList, table: Table, clear: number, underside: number): void {
   const { base: kind } = table;
   const halfLength = table.lengthMm / 2;
   const halfWidth = table.widthMm / 2;
+  const roomX = halfLength - clear - 1;
+  const roomZ = halfWidth - clear - 1;
   if (kind.kind === 'legs') {
-    const inset = Math.max(kind.insetMm, clearMm);
-    const x = Math.max(halfLength - inset - kind.sizeMm / 2, kind.sizeMm / 2 + 1);
-    const z = Math.max(halfWidth - inset - kind.sizeMm / 2, kind.sizeMm / 2 + 1);
+    const size = Math.min(kind.sizeMm, roomX, roomZ);
+    const x = legCentre(halfLength, kind.insetMm, clear, size);
+    const z = legCentre(halfWidth, kind.insetMm, clear, size);
     for (const [sx, sz] of [
       [-1, -1],
       [1, -1],
@@ -80,7 +91,7 @@ function base(list: PartList, table: Table, clearMm: number, underside: number):
       [1, 1],
     ] as const) {
       list.box('leg', 'oak', {
-        sizeMm: [kind.sizeMm, underside, kind.sizeMm],
+        sizeMm: [size, underside, size],
         centreMm: [sx * x, underside / 2, sz * z],
         grain: 'y',
       });
@@ -88,41 +99,40 @@ function base(list: PartList, table: Table, clearMm: number, underside: number):
     return;
   }
   if (kind.kind === 'trestles') {
-    const inset = Math.max(kind.insetMm, clearMm);
-    const x = Math.max(halfLength - inset - kind.thicknessMm / 2, kind.thicknessMm / 2 + 1);
-    const depth = Math.max(2 * (halfWidth - Math.max(clearMm, table.widthMm * 0.1)), 10);
+    const thickness = Math.min(kind.thicknessMm, roomX);
+    const x = legCentre(halfLength, kind.insetMm, clear, thickness);
+    const depth = 2 * (halfWidth - Math.max(clear, table.widthMm * 0.1));
     for (const sign of [-1, 1]) {
       list.box('leg', 'oak', {
-        sizeMm: [kind.thicknessMm, underside, depth],
+        sizeMm: [thickness, underside, depth],
         centreMm: [sign * x, underside / 2, 0],
         grain: 'y',
       });
     }
     return;
   }
-  columns(list, table, kind, underside);
+  columns(list, table, kind, { roomX, roomZ, underside });
 }
 
 function columns(
   list: PartList,
   table: Table,
   kind: Extract<Table['base'], { kind: 'columns' }>,
-  underside: number,
+  { roomX, roomZ, underside }: { roomX: number; roomZ: number; underside: number },
 ): void {
-  const { footLengthMm, diameterMm } = kind;
+  const radius = Math.min(kind.diameterMm / 2, roomZ, kind.count === 1 ? roomX : roomX / 2);
   const footHeight = Math.min(kind.footHeightMm, underside / 2);
-  const footWidth = Math.min(diameterMm * 0.8, footLengthMm / 2);
-  const xs = kind.count === 1 ? [0] : [-table.lengthMm / 4, table.lengthMm / 4];
-  for (const x of xs) {
+  const apart = Math.min(table.lengthMm / 4, roomX - radius);
+  for (const x of kind.count === 1 ? [0] : [-apart, apart]) {
     list.cylinder('column', 'walnut', {
       xMm: x,
       zMm: 0,
-      radiusMm: diameterMm / 2,
+      radiusMm: radius,
       bottomMm: footHeight,
       topMm: underside,
     });
     list.box('foot', 'walnut', {
-      sizeMm: [footWidth, footHeight, footLengthMm],
+      sizeMm: [radius * 1.6, footHeight, kind.footLengthMm],
       centreMm: [x, footHeight / 2, 0],
       grain: 'z',
     });

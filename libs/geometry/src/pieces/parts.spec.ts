@@ -1,0 +1,132 @@
+import fc from 'fast-check';
+import { describe, expect, it } from 'vitest';
+import { anyBench, anyPiece } from '../../test/arbitrary-pieces.ts';
+import { cornersOf, overlapDepth } from '../../test/convex-overlap.ts';
+import type { Part } from '../parts/part.ts';
+import { toPiece } from '../parts/placement.ts';
+import type { PieceOf } from '../room/document.ts';
+import { emptySetDocument } from '../room/read-document.ts';
+import { newPiece } from '../room/edit-pieces.ts';
+import { benchLayout } from './bench-layout.ts';
+import { derivePieceParts, pieceEnvelope } from './kinds.ts';
+import { pressedSeatHeightMm } from './seat-sink.ts';
+
+/** Parts that touch may share this much by rounding. */
+const TOLERANCE_MM = 0.01;
+const HERE = { xMm: 0, zMm: 0, turnDeg: 0 };
+
+function volumeMm3({ solid }: Part): number {
+  if (solid.shape === 'box') return solid.sizeMm[0] * solid.sizeMm[1] * solid.sizeMm[2];
+  if (solid.shape === 'cylinder') return Math.PI * solid.radiusMm ** 2 * solid.heightMm;
+  const twice = solid.outlineMm.reduce((sum, [x, y], i) => {
+    const [nx, ny] = solid.outlineMm[(i + 1) % solid.outlineMm.length] ?? [x, y];
+    return sum + x * ny - nx * y;
+  }, 0);
+  return (twice / 2) * solid.depthMm;
+}
+
+describe('parts of a piece', () => {
+  it('do not reach into each other', () => {
+    fc.assert(
+      fc.property(anyPiece, (piece) => {
+        const parts = derivePieceParts(piece);
+        parts.forEach((one, i) => {
+          for (const other of parts.slice(i + 1)) {
+            const depth = overlapDepth(one, other);
+            if (depth > TOLERANCE_MM) throw new Error(`${one.id} and ${other.id} share ${depth} mm`);
+          }
+        });
+      }),
+      { numRuns: 150 },
+    );
+  });
+
+  it('stay inside the envelope of the piece and above the floor', () => {
+    fc.assert(
+      fc.property(anyPiece, (piece) => {
+        const { minMm, maxMm } = pieceEnvelope(piece);
+        for (const part of derivePieceParts(piece)) {
+          for (const corner of cornersOf(part)) {
+            toPiece(piece.at, corner).forEach((value, axis) => {
+              const [low, high] = [minMm[axis] ?? 0, maxMm[axis] ?? 0];
+              if (value < low - TOLERANCE_MM || value > high + TOLERANCE_MM) {
+                throw new Error(`${part.id} axis ${axis}: ${value} outside ${low}..${high}`);
+              }
+            });
+          }
+        }
+      }),
+      { numRuns: 300 },
+    );
+  });
+
+  it('have a positive volume and ids that do not repeat', () => {
+    fc.assert(
+      fc.property(anyPiece, (piece) => {
+        const parts = derivePieceParts(piece);
+        expect(new Set(parts.map(({ id }) => id)).size).toBe(parts.length);
+        for (const part of parts) expect(volumeMm3(part)).toBeGreaterThan(0);
+      }),
+    );
+  });
+});
+
+describe('a bench', () => {
+  it('keeps seat depth, pressed height and heel room where they are stated', () => {
+    fc.assert(
+      fc.property(anyBench, (bench) => {
+        const layout = benchLayout(bench);
+        expect(layout.frontZMm - layout.faceZMm).toBeCloseTo(bench.seatDepthMm, 6);
+        const seats = derivePieceParts(bench).filter(({ role }) => role === 'seat-cushion');
+        const tops = seats.flatMap(cornersOf).map((corner) => toPiece(bench.at, corner));
+        if (tops.length === 0) return;
+        // The upper front edge of the cushion is the front edge of the seat.
+        const onTop = tops.filter(
+          ([, y, z]) => Math.hypot(y - layout.seatTopFrontMm, z - layout.frontZMm) < 1e-6,
+        );
+        expect(onTop.length).toBe(2 * seats.length);
+      }),
+    );
+  });
+
+  it('splits a long run into equal cushions that fill it', () => {
+    const bench: PieceOf<'bench'> = { ...newPiece('bench', 'b1', 'B1', HERE), lengthMm: 3000 };
+    const cushions = derivePieceParts(bench).filter(({ role }) => role === 'seat-cushion');
+    // 3000 − 2 × 12.7 = 2974.6, split below 1219.2: three of 991.53.
+    expect(cushions.map(({ solid }) => (solid.shape === 'box' ? solid.sizeMm[0] : 0))).toEqual([
+      expect.closeTo(991.533, 2),
+      expect.closeTo(991.533, 2),
+      expect.closeTo(991.533, 2),
+    ]);
+  });
+
+  it('sits where the demonstration bench sits: deck 15 in, cushion 3 3/4 in, pressed 18 in', () => {
+    const start = newPiece('bench', 'b1', 'B1', HERE);
+    const bench = { ...start, deckHeightMm: 15 * 25.4 };
+    // By hand: 0.7 × 0.78 × 169.76 lb over 110 in² is 0.8426 psi; 50 lbf over 50 in² is 1 psi; 0.25 × 0.8426 × 3.75 in.
+    expect(pressedSeatHeightMm(bench) / 25.4).toBeCloseTo(15 + 3.75 - 0.79, 2);
+  });
+});
+
+describe('a bulkhead behind a sill', () => {
+  const wall = { ...newPiece('bulkhead', 'w1', 'W1', { xMm: 300, zMm: -50, turnDeg: 90 }), lengthMm: 3000 };
+  const sill = newPiece('sill', 's1', 'S1', { xMm: 300, zMm: 200, turnDeg: 90 });
+  const document = { ...emptySetDocument(), pieces: [wall, sill] };
+
+  it.each(['vertical', 'horizontal'] as const)('leaves the window free with %s boards', (boardDirection) => {
+    const boards = derivePieceParts({ ...wall, boardDirection }, document);
+    const window = derivePieceParts(sill).filter(({ role }) => role === 'glass' || role === 'frame');
+    expect(window).toHaveLength(5);
+    for (const part of window) {
+      for (const board of boards) expect(overlapDepth(part, board)).toBeLessThanOrEqual(TOLERANCE_MM);
+    }
+  });
+
+  it('loses exactly the hole', () => {
+    const volume = (parts: Part[]) => parts.reduce((sum, part) => sum + volumeMm3(part), 0);
+    const solid: PieceOf<'bulkhead'> = { ...wall, boards: { faceMm: 100, revealMm: 0 } };
+    const lost = volume(derivePieceParts(solid)) - volume(derivePieceParts(solid, document));
+    const { widthMm, heightMm, frameMm } = sill.opening;
+    expect(lost).toBeCloseTo((widthMm + 2 * frameMm) * (heightMm + 2 * frameMm) * wall.thicknessMm, -3);
+  });
+});
