@@ -45,6 +45,8 @@ export interface DimensionShape extends Owned {
   quiet?: true;
   /** 0 puts the number in the line; 1, 2 … lift it clear of its neighbours when the stretch is short. */
   labelLane: number;
+  /** Where the number stands along the line; the middle unless said. */
+  labelAt?: 'middle' | 'to';
 }
 
 /** A drawing as plain data; its shapes are painted in order. */

@@ -16,6 +16,8 @@ export interface PlanOptions {
 }
 
 const HEAD_RADIUS_MM = 105;
+/** How thick the back of a loose seat is shown. */
+const LOOSE_BACK_MM = 20;
 /** Pieces lower down are painted first. */
 const PAINTING_ORDER: readonly Piece['kind'][] = [
   'bulkhead',
@@ -110,6 +112,9 @@ function pieceShapes(piece: Piece, marks: Map<string, string>): DrawShape[] {
         shapes.push(
           area(piece, rectangle(piece, -half + 15, half - 15, 15, piece.seatDepthMm - 10), 'fine', 'cloth'),
         );
+      }
+      if (piece.backHeightMm > 0) {
+        shapes.push(area(piece, rectangle(piece, -half, half, -LOOSE_BACK_MM, 0), 'edge', 'oak'));
       }
       return shapes;
     }
