@@ -4,10 +4,12 @@ import type { NestExpressApplication } from '@nestjs/platform-express';
 import { Logger } from 'nestjs-pino';
 import { AppModule } from './app.module';
 import { setUpHttp } from './common/http';
-import { SettingsError, settings, type Settings } from './config/settings';
+import { readSettings, SettingsError, settings, type Settings } from './config/settings';
 import { serveOpenApi } from './openapi';
 
 async function start(): Promise<void> {
+  // Read once before anything starts: faults of the environment are told without a stack.
+  readSettings(process.env);
   const app = await NestFactory.create<NestExpressApplication>(AppModule, {
     abortOnError: false,
     bodyParser: false,

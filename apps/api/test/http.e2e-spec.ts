@@ -74,7 +74,7 @@ describe('what cannot be read', () => {
 
 describe('other sites', () => {
   const fromSite = (headers: Record<string, string>) =>
-    http().post('/api/auth/sign-in').set(headers).set('Host', 'settlewright.test').send(signIn);
+    http().post('/api/auth/sign-in').set('Host', 'settlewright.test').set(headers).send(signIn);
 
   it.each([
     [{ 'Sec-Fetch-Site': 'cross-site' }],

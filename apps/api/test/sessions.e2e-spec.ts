@@ -2,7 +2,7 @@ import { afterAll, beforeAll, describe, expect, it } from '@jest/globals';
 import request, { type Response } from 'supertest';
 import { RefreshToken } from '../src/auth/entities/refresh-token.entity';
 import { Session } from '../src/auth/entities/session.entity';
-import { SessionsService } from '../src/auth/sessions.service';
+import { CleanUp } from '../src/auth/clean-up';
 import { User } from '../src/users/entities/user.entity';
 import { as, createPerson } from './factories/people';
 import { startTestApp, type TestApp } from './test-app';
@@ -116,6 +116,7 @@ describe('signing in', () => {
     const refused = await signIn('limit@people.test').expect(429);
     expect(refused.body.code).toBe('too-many-attempts');
     expect(refused.body.retryAfterSeconds).toBeGreaterThan(0);
+    expect(refused.get('Retry-After')).toBe(String(refused.body.retryAfterSeconds));
     await signUp('other-limit@people.test').expect(201);
     await signIn('other-limit@people.test').expect(200);
   });
@@ -215,7 +216,7 @@ it('removes expired sessions with their tokens', async () => {
   const first = await signUp('old@people.test').expect(201);
   const owner = { userId: first.body.user.id };
   await test.dataSource.manager.update(Session, owner, { expiresAt: new Date(Date.now() - 1) });
-  await test.app.get(SessionsService).removeExpired();
+  await test.app.get(CleanUp).run();
   expect(await test.dataSource.manager.countBy(Session, owner)).toBe(0);
 });
 

@@ -38,7 +38,7 @@ export function setUpHttp(app: NestExpressApplication, config: Settings): void {
     }),
     compression(),
     cookieParser(),
-    refuseOtherSites,
+    refuseOtherSites(config.publicUrl),
   );
   app.useBodyParser('json', { limit: BODY_LIMIT.bytes });
   app.use(nameBodyFaults);

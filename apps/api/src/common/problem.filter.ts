@@ -20,6 +20,7 @@ export class ProblemFilter implements ExceptionFilter {
       response.end();
       return;
     }
+    if ('retryAfterSeconds' in body) response.setHeader('Retry-After', String(body.retryAfterSeconds));
     response.status(body.status).type('application/problem+json').send(JSON.stringify(body));
   }
 
