@@ -1,8 +1,8 @@
-import type { FitSheet, Verdict } from '@settlewright/anthropometry';
+import type { Verdict } from '@settlewright/anthropometry';
 import type { SetDocument } from '@settlewright/geometry';
 import { useMutation, useQuery, useQueryClient } from '@tanstack/react-query';
 import { api, Problem, Unreachable } from '@/lib/api-client';
-import type { CastMember, Draft, Page, Production } from '@/lib/contract';
+import type { CastMember, Draft, Page } from '@/lib/contract';
 import type { ServerFitSheet } from './picture';
 import type { DraftConflict, PutDraft } from './save/autosave';
 
@@ -20,6 +20,13 @@ export interface SetInfo {
   lastRevision?: { letter: string; issuedAt: string } | null;
 }
 
+export interface Approval {
+  decision: 'approved' | 'changes-wanted';
+  comment: string;
+  decidedBy: { id: string; name: string };
+  decidedAt: string;
+}
+
 export interface Revision {
   letter: string;
   number: number;
@@ -27,26 +34,22 @@ export interface Revision {
   issuedBy: { id: string; name: string };
   note: string;
   counts: Record<Verdict, number>;
-  approval?: {
-    decision: 'approved' | 'changes-wanted';
-    comment: string;
-    by: { id: string; name: string };
-    at: string;
-  } | null;
+  approval?: Approval;
 }
 
 export interface FullRevision extends Revision {
   document: SetDocument;
-  fitSheet: FitSheet;
+  fitSheet: ServerFitSheet;
+  approvals: Approval[];
 }
 
 export interface Note {
   id: string;
   text: string;
-  pieceId?: string | null;
+  pieceId?: string;
   kind: 'comment' | 'mark';
-  by: { id: string; name: string };
-  at: string;
+  createdBy: { id: string; name: string };
+  createdAt: string;
   resolved: boolean;
 }
 
@@ -60,13 +63,10 @@ const production = ({ workshopId, productionId }: SetPath): string =>
   `/workshops/${workshopId}/productions/${productionId}`;
 export const setAddress = (path: SetPath): string => `${production(path)}/sets/${path.setId}`;
 
-const keyOf = (path: SetPath, ...rest: string[]) => ['set', path.setId, ...rest];
+/** Lists that a page shows whole. */
+const LONG_PAGE = { pageSize: 200 };
 
-export const useProduction = (path: SetPath) =>
-  useQuery({
-    queryKey: ['production', path.productionId],
-    queryFn: () => api.get<Production>(production(path)),
-  });
+const keyOf = (path: SetPath, ...rest: string[]) => ['set', path.setId, ...rest];
 
 export const useSetInfo = (path: SetPath) =>
   useQuery({ queryKey: keyOf(path), queryFn: () => api.get<SetInfo>(setAddress(path)) });
@@ -76,7 +76,7 @@ export const useCast = (path: SetPath) =>
   useQuery({
     queryKey: ['cast', path.productionId, 'room'],
     queryFn: async () =>
-      (await api.get<Page<CastMember>>(`${production(path)}/cast`, { query: { pageSize: 200, sort: 'name' } }))
+      (await api.get<Page<CastMember>>(`${production(path)}/cast`, { query: { ...LONG_PAGE, sort: 'name' } }))
         .items,
   });
 
@@ -123,10 +123,8 @@ export const putDraft =
 export const useRevisions = (path: SetPath) =>
   useQuery({
     queryKey: keyOf(path, 'revisions'),
-    queryFn: async () => {
-      const answer = await api.get<Revision[] | Page<Revision>>(`${setAddress(path)}/revisions`);
-      return Array.isArray(answer) ? answer : answer.items;
-    },
+    queryFn: async () =>
+      (await api.get<Page<Revision>>(`${setAddress(path)}/revisions`, { query: LONG_PAGE })).items,
   });
 
 export const useRevision = (path: SetPath, letter: string | undefined) =>
@@ -137,7 +135,11 @@ export const useRevision = (path: SetPath, letter: string | undefined) =>
     staleTime: Infinity,
   });
 
-function useSetMutation<Input, Output>(path: SetPath, send: (input: Input) => Promise<Output>, ...about: string[]) {
+function useSetMutation<Input, Output>(
+  path: SetPath,
+  send: (input: Input) => Promise<Output>,
+  ...about: string[]
+) {
   const client = useQueryClient();
   return useMutation({
     mutationFn: send,
@@ -169,10 +171,7 @@ export const useApprove = (path: SetPath) =>
 export const useNotes = (path: SetPath) =>
   useQuery({
     queryKey: keyOf(path, 'notes'),
-    queryFn: async () => {
-      const answer = await api.get<Note[] | Page<Note>>(`${setAddress(path)}/notes`);
-      return Array.isArray(answer) ? answer : answer.items;
-    },
+    queryFn: async () => (await api.get<Page<Note>>(`${setAddress(path)}/notes`, { query: LONG_PAGE })).items,
   });
 
 export const useAddNote = (path: SetPath) =>
@@ -194,7 +193,7 @@ export const useResolveNote = (path: SetPath) =>
 export const useBuilt = (path: SetPath) =>
   useQuery({
     queryKey: keyOf(path, 'built'),
-    queryFn: () => api.get<BuiltPart[]>(`${setAddress(path)}/built`),
+    queryFn: async () => (await api.get<{ items: BuiltPart[] }>(`${setAddress(path)}/built`)).items,
   });
 
 export const useMarkBuilt = (path: SetPath) =>

@@ -13,10 +13,12 @@ import {
   measureSet,
   placeFrames,
   poseMannequin,
+  type MannequinMesh,
   type MannequinPose,
   type Part,
   type PlaceFrame,
   type SetDocument,
+  type Vec3,
 } from '@settlewright/geometry';
 import type { CastMember } from '@/lib/contract';
 import type { FitEngine } from './engine';
@@ -32,7 +34,9 @@ export interface SeatedBody {
   /** True when the height itself, or more, was predicted or told. */
   estimated: boolean;
   pose: MannequinPose;
-  mesh: ReturnType<typeof mannequinMesh>;
+  mesh: MannequinMesh;
+  /** Top of the head, where the leader of a name ends. */
+  crownMm: Vec3;
 }
 
 /** Everything that follows from a document. */
@@ -47,7 +51,7 @@ export interface RoomPicture {
 /** What the server makes for readers who may not see measures. */
 export type ServerFitSheet = FitSheet & {
   detail: 'full' | 'verdicts';
-  bodies: { placeId: string; means: Record<MeasureKey, number>; shoeMm?: number }[];
+  bodies?: { placeId: string; means: Record<MeasureKey, number>; shoeMm: number }[];
 };
 
 export interface PictureMaker {
@@ -62,9 +66,15 @@ interface BodyInput {
   estimated: boolean;
 }
 
+function crownOf(pose: MannequinPose, frame: PlaceFrame): Vec3 {
+  const head = pose.segments.find((segment) => segment.tag === 'head' && segment.kind === 'ellipsoid');
+  const [x, , z] = head?.kind === 'ellipsoid' ? head.centreMm : frame.hipMm;
+  return [x, pose.headTopMm, z];
+}
+
 /** Remembers the last body drawn at a place, so that a change elsewhere costs nothing. */
 function createBodyMaker() {
-  const kept = new Map<string, { key: string; pose: MannequinPose; mesh: SeatedBody['mesh'] }>();
+  const kept = new Map<string, { key: string; pose: MannequinPose; mesh: MannequinMesh }>();
   return (frame: PlaceFrame, situation: PlaceSituation, body: BodyInput) => {
     const sinkMm = situation.foam ? seatSinkMm(situation.foam, body.weightKg).sinkMm : 0;
     const input = { means: body.means, shoeMm: body.shoeMm, frame, situation, sinkMm };
@@ -110,11 +120,11 @@ export function createPictureMaker(
   }
 
   function inputs(document: SetDocument): Map<string, BodyInput> {
-    if (server) {
+    if (server?.bodies) {
       return new Map(
         server.bodies.map(({ placeId, means, shoeMm }) => [
           placeId,
-          { means, shoeMm: shoeMm ?? 25, weightKg: REFERENCE_SITTER_KG, estimated: false },
+          { means, shoeMm, weightKg: REFERENCE_SITTER_KG, estimated: false },
         ]),
       );
     }
@@ -122,10 +132,7 @@ export function createPictureMaker(
       sittersOf(document, cast, engine.model).map(({ placeId, person }) => {
         const body = engine.model.predict(person);
         const estimated = !person.exact && Object.keys(person.measured).length === 0;
-        return [
-          placeId,
-          { means: body.means(), shoeMm: person.shoeMm, weightKg: body.weightKg, estimated },
-        ];
+        return [placeId, { means: body.means(), shoeMm: person.shoeMm, weightKg: body.weightKg, estimated }];
       }),
     );
   }
@@ -133,7 +140,7 @@ export function createPictureMaker(
   function bodiesOf(document: SetDocument, situation: SetSituation): SeatedBody[] {
     const bodies = inputs(document);
     const frames = new Map(
-      document.pieces.flatMap((piece) => placeFrames(piece)).map((frame) => [frame.placeId, frame]),
+      document.pieces.flatMap((piece) => placeFrames(piece, document)).map((frame) => [frame.placeId, frame]),
     );
     return document.seating.flatMap(({ pieceId, place, sitter }): SeatedBody[] => {
       const placeId = `${pieceId}:${place}`;
@@ -152,6 +159,7 @@ export function createPictureMaker(
           estimated: body.estimated,
           pose,
           mesh,
+          crownMm: crownOf(pose, frame),
         },
       ];
     });

@@ -47,9 +47,7 @@ export function personOf(member: CastMember): KnownPerson | undefined {
   const measured = Object.entries(member.measured ?? {}).map(([key, value]) => [key, value.mm]);
   return {
     bodyData: member.bodyData,
-    stature: member.statureMm
-      ? { mm: member.statureMm, source: member.statureSource ?? 'told' }
-      : undefined,
+    stature: member.statureMm ? { mm: member.statureMm, source: member.statureSource ?? 'told' } : undefined,
     weightKg: member.weightKg ?? undefined,
     measured: Object.fromEntries(measured) as KnownPerson['measured'],
     shoeMm: member.shoeMm ?? 0,
@@ -60,16 +58,14 @@ export function personOf(member: CastMember): KnownPerson | undefined {
 const people = new WeakMap<CastMember, KnownPerson | undefined>();
 
 /** Everyone who sits in the document and whose body is known here. */
-export function sittersOf(
-  document: SetDocument,
-  cast: readonly CastMember[],
-  model: BodyModel,
-): Sitter[] {
+export function sittersOf(document: SetDocument, cast: readonly CastMember[], model: BodyModel): Sitter[] {
   return document.seating.flatMap(({ pieceId, place, sitter }): Sitter[] => {
     const placeId = `${pieceId}:${place}`;
     if (sitter.kind === 'mannequin') {
       const id = `${sitterKey(sitter)}@${placeId}`;
-      return [{ id, name: mannequinName(sitter), kind: 'mannequin', placeId, person: model.mannequin(sitter) }];
+      return [
+        { id, name: mannequinName(sitter), kind: 'mannequin', placeId, person: model.mannequin(sitter) },
+      ];
     }
     const member = cast.find((candidate) => candidate.id === sitter.castId);
     if (!member) return [];

@@ -24,7 +24,9 @@ describe('names above the heads', () => {
     const placed = placeNames(frame, viewport, heads);
     expect(placed.map((name) => name.id)).toEqual(['p1', 'p2', 'p0', 'p3']);
     expect(new Set(placed.map((name) => name.y)).size).toBe(1);
-    placed.slice(1).forEach((name, n) => expect(name.x - (placed[n]?.x ?? 0)).toBeGreaterThanOrEqual(88 - 1e-6));
+    placed
+      .slice(1)
+      .forEach((name, n) => expect(name.x - (placed[n]?.x ?? 0)).toBeGreaterThanOrEqual(88 - 1e-6));
   });
 
   it('stay on the sheet when the heads crowd at its edge', () => {
@@ -34,7 +36,8 @@ describe('names above the heads', () => {
       width: 90,
       height: 16,
     }));
-    for (const name of placeNames(frame, viewport, heads)) expect(name.x + 45).toBeLessThanOrEqual(794 + 1e-6);
+    for (const name of placeNames(frame, viewport, heads))
+      expect(name.x + 45).toBeLessThanOrEqual(794 + 1e-6);
   });
 });
 

@@ -49,7 +49,11 @@ const HEAD_WIDTH_MM = 160;
 const HEAD_HEIGHT_MM = 240;
 
 /** Puts names into one row, in the order of their heads so that no leader crosses another. */
-export function placeNames(frame: ViewFrame, viewport: Viewport, names: readonly NameToPlace[]): PlacedName[] {
+export function placeNames(
+  frame: ViewFrame,
+  viewport: Viewport,
+  names: readonly NameToPlace[],
+): PlacedName[] {
   const heads = names
     .map((name) => ({ name, head: project(frame, viewport, name.headMm) }))
     .filter(({ head }) => head.x > -40 && head.x < viewport.width + 40)

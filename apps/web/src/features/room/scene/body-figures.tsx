@@ -1,41 +1,51 @@
+import { MANNEQUIN_TAGS, type MannequinMesh } from '@settlewright/geometry';
 import { useEffect, useMemo } from 'react';
-import { BufferAttribute, BufferGeometry, type ShaderMaterial } from 'three';
-import type { RoomPicture, SeatedBody } from '../picture';
-import type { Palette } from './palette';
-import { createBodyMaterial, type SharedUniforms } from './shaders';
+import { BufferAttribute, BufferGeometry } from 'three';
+import type { RoomPicture, SeatedBody } from '../picture.ts';
+import { linesOf } from './ink-lines.ts';
+import type { Palette } from './palette.ts';
+import { createBodyMaterial, type SceneMaterials, type SharedUniforms } from './shaders.ts';
 
-/** Tones of the body shader: suit, skin of the lay figure, shoe. */
-const TONE_OF_TAG: Partial<Record<string, number>> = { suit: 0, head: 1, hand: 1, shoe: 2 };
+/** Tones of the body shader: suit, paler head and hands, dark shoes. */
+const TONE_OF_TAG: Record<(typeof MANNEQUIN_TAGS)[number], number> = { suit: 0, head: 1, hand: 1, shoe: 2 };
+const SEAM_WEIGHT = 0.28;
 
-function geometryOf(mesh: SeatedBody['mesh']): BufferGeometry {
+function geometryOf(mesh: MannequinMesh): BufferGeometry {
   const geometry = new BufferGeometry();
   geometry.setAttribute('position', new BufferAttribute(mesh.positions, 3));
   geometry.setAttribute('normal', new BufferAttribute(mesh.normals, 3));
-  const tones = Float32Array.from(mesh.tags, (tag) => TONE_OF_TAG[tag] ?? 0);
+  const tones = Float32Array.from(mesh.tags, (tag) => TONE_OF_TAG[MANNEQUIN_TAGS[tag] ?? 'suit']);
   geometry.setAttribute('tone', new BufferAttribute(tones, 1));
   geometry.setIndex(new BufferAttribute(mesh.indices, 1));
   return geometry;
+}
+
+function seamsOf({ positions, seams }: MannequinMesh) {
+  const ends = Array.from(seams, (vertex) => [...positions.slice(vertex * 3, vertex * 3 + 3)]);
+  return linesOf(ends.flat(), new Array<number>(seams.length / 2).fill(SEAM_WEIGHT));
 }
 
 interface FigureProps {
   body: SeatedBody;
   palette: Palette;
   shared: SharedUniforms;
-  hull: ShaderMaterial;
+  materials: SceneMaterials;
 }
 
-function Figure({ body, palette, shared, hull }: FigureProps) {
+function Figure({ body, palette, shared, materials }: FigureProps) {
   const geometry = useMemo(() => geometryOf(body.mesh), [body.mesh]);
+  const seams = useMemo(() => seamsOf(body.mesh), [body.mesh]);
   const material = useMemo(() => {
     const colour = palette.sitters[body.colour - 1] ?? palette.sitters[5];
     return createBodyMaterial(shared, (colour ?? palette.pen).clone());
   }, [palette, body.colour, shared]);
   useEffect(() => () => geometry.dispose(), [geometry]);
+  useEffect(() => () => seams.dispose(), [seams]);
   useEffect(() => () => material.dispose(), [material]);
   return (
     <>
-      <mesh geometry={geometry} material={hull} frustumCulled={false} />
       <mesh geometry={geometry} material={material} frustumCulled={false} />
+      <mesh geometry={seams} material={materials.edges} renderOrder={2} frustumCulled={false} />
     </>
   );
 }

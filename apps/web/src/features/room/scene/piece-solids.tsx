@@ -9,10 +9,7 @@ import type { ViewLetter } from './views';
 
 /** Frees what a memo made when it is made again. */
 export function useDispose(geometries: Record<string, BufferGeometry>) {
-  useEffect(
-    () => () => Object.values(geometries).forEach((geometry) => geometry.dispose()),
-    [geometries],
-  );
+  useEffect(() => () => Object.values(geometries).forEach((geometry) => geometry.dispose()), [geometries]);
 }
 
 interface Props {

@@ -6,8 +6,9 @@ import { BodyFigures } from './body-figures';
 import { Ground } from './ground';
 import { PieceSolids } from './piece-solids';
 import { readPalette } from './palette';
-import { createMaterials, createSharedUniforms } from './shaders';
+import { createMaterials, createSharedUniforms, type SharedUniforms } from './shaders';
 import type { ViewController } from './view-controller';
+import { add, scale, turn } from './vectors';
 import { projectionColumns, type ViewFrame } from './view-frame';
 import type { Cut, ViewLetter } from './views';
 
@@ -35,6 +36,18 @@ const inMetres = (frame: ViewFrame): ViewFrame => ({
   depthMm: [frame.depthMm[0] * METRES, frame.depthMm[1] * METRES],
 });
 
+/** Where the eye stands in the room, for what is drawn by how it is seen. */
+function placeEye(shared: SharedUniforms, frame: ViewFrame) {
+  const toward = turn(frame.orientation, [0, 0, 1]);
+  if (frame.perspective < 1e-9) {
+    shared.uEye.value.set(...toward, 0);
+    return;
+  }
+  const right = scale(turn(frame.orientation, [1, 0, 0]), frame.eyeMm[0]);
+  const up = scale(turn(frame.orientation, [0, 1, 0]), frame.eyeMm[1]);
+  shared.uEye.value.set(...add(frame.target, add(add(right, up), scale(toward, 1 / frame.perspective))), 1);
+}
+
 function aim(camera: OrthographicCamera, frame: ViewFrame, aspect: number) {
   camera.position.set(frame.target[0] * METRES, frame.target[1] * METRES, frame.target[2] * METRES);
   camera.quaternion.set(...frame.orientation);
@@ -56,9 +69,9 @@ function Stage({ picture, controller, letter, cut, selectedPieceId, showBodies, 
     palette.tones.forEach((tone, n) => shared.uTones.value[n]?.copy(tone));
     shared.uPen.value.copy(palette.pen);
     shared.uShade.value.copy(palette.shade);
-    materials.chosenInk.copy(palette.chosen);
-    materials.floor.uniforms.uInk?.value.copy(palette.floor);
-    materials.wall.uniforms.uInk?.value.copy(palette.wall);
+    materials.inks.chosen.copy(palette.chosen);
+    materials.inks.floor.copy(palette.floor);
+    materials.inks.wall.copy(palette.wall);
     invalidate();
   }, [palette, shared, materials, invalidate]);
 
@@ -87,6 +100,7 @@ function Stage({ picture, controller, letter, cut, selectedPieceId, showBodies, 
   useFrame(({ gl: renderer, scene }) => {
     const frame = controller.frame();
     if (!frame) return;
+    placeEye(shared, frame);
     aim(camera, frame, size.width / Math.max(1, size.height));
     renderer.render(scene, camera);
     const { calls, triangles } = renderer.info.render;
@@ -106,7 +120,9 @@ function Stage({ picture, controller, letter, cut, selectedPieceId, showBodies, 
         selectedPieceId={selectedPieceId}
         materials={materials}
       />
-      {showBodies && <BodyFigures picture={picture} palette={palette} shared={shared} hull={materials.hull} />}
+      {showBodies && (
+        <BodyFigures picture={picture} palette={palette} shared={shared} materials={materials} />
+      )}
     </group>
   );
 }

@@ -17,6 +17,8 @@ export function createSharedUniforms() {
     uPen: { value: new Vector3() },
     uShade: { value: new Vector3() },
     uSize: { value: new Vector2(1, 1) },
+    /** Eye of a perspective with w 1; direction towards the viewer of a drawing to scale with w 0. */
+    uEye: { value: new Vector4(0, 0, 1, 0) },
     /** Plane of the section: normal towards the viewer, and distance; w large cuts nothing. */
     uCut: { value: new Vector4(0, 0, 0, 1) },
   };
@@ -104,32 +106,27 @@ const LINE_FRAGMENT = /* glsl */ `
   ${CUT}
   void main() { cut(); gl_FragColor = vec4(uInk, vWeight); }`;
 
-const BODY_VERTEX = /* glsl */ `
-  attribute float tone;
-  varying vec3 vRoom;
-  varying vec3 vNormalRoom;
-  varying float vTone;
-  void main() {
-    vRoom = position;
-    vNormalRoom = normal;
-    vTone = tone;
-    gl_Position = projectionMatrix * modelViewMatrix * vec4(position, 1.0);
-  }`;
-
 /** One light from the upper front, softened at the two steps so that no blotch is drawn. */
 const BODY_FRAGMENT = /* glsl */ `
   uniform vec3 uColour;
+  uniform vec3 uPen;
+  uniform vec4 uEye;
   varying vec3 vNormalRoom;
   varying float vTone;
   ${CUT}
   void main() {
     cut();
+    vec3 n = normalize(vNormalRoom);
     vec3 base = uColour;
     if (vTone > 1.5) base = mix(uColour * 0.42, vec3(0.18, 0.14, 0.1), 0.35);
     else if (vTone > 0.5) base = mix(uColour, vec3(1.0, 0.97, 0.92), 0.26);
-    float lit = dot(normalize(vNormalRoom), normalize(vec3(-0.3, 0.9, 0.4)));
+    float lit = dot(n, normalize(vec3(-0.3, 0.9, 0.4)));
     vec3 colour = mix(base * 0.84, base, smoothstep(-0.14, 0.0, lit));
     colour = mix(colour, mix(base, vec3(1.0), 0.13), smoothstep(0.6, 0.72, lit));
+    // Ink where the skin turns away: so many pixels before the facing falls to nothing.
+    float facing = abs(dot(n, normalize(uEye.xyz - vRoom * uEye.w)));
+    float inside = facing / max(fwidth(facing), 1e-5);
+    colour = mix(uPen, colour, smoothstep(1.2, 2.4, inside));
     gl_FragColor = vec4(colour, 1.0);
   }`;
 
@@ -178,19 +175,20 @@ export function createMaterials(shared: SharedUniforms) {
     uniforms: { ...shared, uWidth: { value: width }, uInk: { value: ink } },
     transparent: true,
     depthWrite: false,
+    side: DoubleSide,
   });
-  const fade = (boards: number) =>
+  const fade = (boards: number, ink: Vector3) =>
     new ShaderMaterial({
       vertexShader: FADE_VERTEX,
       fragmentShader: FADE_FRAGMENT,
-      uniforms: { uInk: { value: new Vector3() }, uBoards: { value: boards } },
+      uniforms: { uInk: { value: ink }, uBoards: { value: boards } },
       transparent: true,
       depthWrite: false,
       side: DoubleSide,
     });
-  const chosenInk = new Vector3();
+  const [chosenInk, floorInk, wallInk] = [new Vector3(), new Vector3(), new Vector3()];
   return {
-    chosenInk,
+    inks: { chosen: chosenInk, floor: floorInk, wall: wallInk },
     surface: new ShaderMaterial({
       ...solid,
       side: DoubleSide,
@@ -236,8 +234,8 @@ export function createMaterials(shared: SharedUniforms) {
       stencilFunc: NotEqualStencilFunc,
       stencilZPass: ReplaceStencilOp,
     }),
-    floor: fade(26),
-    wall: fade(0),
+    floor: fade(26, floorInk),
+    wall: fade(0, wallInk),
   };
 }
 
@@ -245,7 +243,7 @@ export type SceneMaterials = ReturnType<typeof createMaterials>;
 
 export function createBodyMaterial(shared: SharedUniforms, colour: Vector3): ShaderMaterial {
   return new ShaderMaterial({
-    vertexShader: BODY_VERTEX,
+    vertexShader: SURFACE_VERTEX,
     fragmentShader: BODY_FRAGMENT,
     uniforms: { ...shared, uColour: { value: colour } },
     side: DoubleSide,

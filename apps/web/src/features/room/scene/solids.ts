@@ -5,10 +5,9 @@ import { add, normalise, partAxes, scale } from './vectors';
 /** Order of the materials in the palette of the shaders. */
 export const MATERIALS: readonly MaterialKey[] = ['oak', 'walnut', 'cloth', 'wall', 'glass', 'ply'];
 
-/** Width class of an edge: 1 is an ink edge, less is the seam between two boards. */
-const SEAM = 0.45;
+/** How strongly an edge is inked: 1 is the edge of a piece, less is a seam between boards. */
+const SEAMS: Partial<Record<Part['role'], number>> = { 'wall-board': 0.17, 'back-board': 0.4 };
 const ROUND_SIDES = 32;
-const SEAM_ROLES: readonly Part['role'][] = ['back-board', 'wall-board'];
 
 export interface SolidArrays {
   positions: number[];
@@ -85,12 +84,7 @@ function addCylinder(out: SolidArrays, part: Part, radius: number, height: numbe
   out.roundNormals.push(...out.normals.slice(start));
 }
 
-function addPrism(
-  out: SolidArrays,
-  part: Part,
-  solid: Extract<Solid, { shape: 'prism' }>,
-  material: number,
-) {
+function addPrism(out: SolidArrays, part: Part, solid: Extract<Solid, { shape: 'prism' }>, material: number) {
   const { at, along } = placer(part);
   const outline = solid.outlineMm;
   const z = solid.depthMm / 2;
@@ -125,7 +119,7 @@ export function mergeParts(parts: readonly Part[]): SolidArrays {
   };
   for (const part of parts) {
     const material = MATERIALS.indexOf(part.material);
-    const weight = SEAM_ROLES.includes(part.role) ? SEAM : 1;
+    const weight = SEAMS[part.role] ?? 1;
     if (part.solid.shape === 'box') addBox(out, part, part.solid.sizeMm, material, weight);
     else if (part.solid.shape === 'cylinder') {
       addCylinder(out, part, part.solid.radiusMm, part.solid.heightMm, material);

@@ -71,7 +71,20 @@ describe('views B, C and D', () => {
     const frame = frameFor(request(letter));
     const inch = (depth: number) => {
       const [a, b]: [readonly [number, number, number], readonly [number, number, number]] =
-        letter === 'D' ? [[0, depth, 0], [100, depth, 0]] : letter === 'B' ? [[depth, 0, 0], [depth, 100, 0]] : [[0, 0, depth], [0, 100, depth]];
+        letter === 'D'
+          ? [
+              [0, depth, 0],
+              [100, depth, 0],
+            ]
+          : letter === 'B'
+            ? [
+                [depth, 0, 0],
+                [depth, 100, 0],
+              ]
+            : [
+                [0, 0, depth],
+                [0, 100, depth],
+              ];
       const [p, q] = [project(frame, viewport, a), project(frame, viewport, b)];
       return Math.hypot(p.x - q.x, p.y - q.y);
     };

@@ -108,6 +108,9 @@ export function between(a: ViewFrame, b: ViewFrame, t: number): ViewFrame {
     eyeMm: [lerp(a.eyeMm[0], b.eyeMm[0], t), lerp(a.eyeMm[1], b.eyeMm[1], t)],
     centreMm: [lerp(a.centreMm[0], b.centreMm[0], t), lerp(a.centreMm[1], b.centreMm[1], t)],
     halfHeightMm: lerp(a.halfHeightMm, b.halfHeightMm, t),
-    depthMm: [perspective > 0 ? Math.min(near, 0.8 / perspective) : near, Math.min(a.depthMm[1], b.depthMm[1])],
+    depthMm: [
+      perspective > 0 ? Math.min(near, 0.8 / perspective) : near,
+      Math.min(a.depthMm[1], b.depthMm[1]),
+    ],
   };
 }

@@ -1,6 +1,6 @@
 import type { Vec3 } from '@settlewright/geometry';
 import { cornersOf, type Bounds } from './bounds';
-import { cross, fromAxes, type Quat } from './vectors';
+import { cross, dot, fromAxes, subtract, type Quat } from './vectors';
 import { onPlane, type ViewFrame, type Viewport } from './view-frame';
 
 /** The lettered views of the key plan, and the free one. */
@@ -16,14 +16,17 @@ export const VIEW_TITLES: Record<ViewLetter, string> = {
 };
 
 /** B, C and D are true to scale and carry a bar. */
-export const isToScale = (letter: ViewLetter): boolean =>
-  letter === 'B' || letter === 'C' || letter === 'D';
+export const isToScale = (letter: ViewLetter): boolean => letter === 'B' || letter === 'C' || letter === 'D';
 
 /** Standing place of the section: a point in the plane and the direction that looks out of it. */
 export interface Cut {
   pointMm: Vec3;
   toward: Vec3;
 }
+
+/** Whether a point is left when the section has taken away what stands before it. */
+export const isBehind = (point: Vec3, cut: Cut | undefined): boolean =>
+  cut === undefined || dot(subtract(point, cut.pointMm), cut.toward) <= 40;
 
 export interface Insets {
   top: number;
@@ -88,7 +91,10 @@ export function frameFor(request: ViewRequest): ViewFrame {
     eyeMm: letter === 'A' ? [0, Math.max(EYE_ABOVE_FLOOR_MM, max[1] + 350) - target[1]] : [0, 0],
     centreMm: [0, 0],
     halfHeightMm: 1,
-    depthMm: [letter === 'A' || letter === 'E' ? Math.min(size + 600, eyeDistance * 0.8) : size + 600, -size - 3000],
+    depthMm: [
+      letter === 'A' || letter === 'E' ? Math.min(size + 600, eyeDistance * 0.8) : size + 600,
+      -size - 3000,
+    ],
   };
   const points = cornersOf(bounds).map((corner) => onPlane(loose, corner));
   const [left, right] = [Math.min(...points.map((p) => p.x)), Math.max(...points.map((p) => p.x))];

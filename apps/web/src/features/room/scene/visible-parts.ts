@@ -12,8 +12,6 @@ function stands(piece: Piece, letter: ViewLetter): boolean {
 
 /** Parts that are drawn in a view. */
 export function visibleParts(document: SetDocument, parts: readonly Part[], letter: ViewLetter): Part[] {
-  const hidden = new Set(
-    document.pieces.filter((piece) => !stands(piece, letter)).map((piece) => piece.id),
-  );
+  const hidden = new Set(document.pieces.filter((piece) => !stands(piece, letter)).map((piece) => piece.id));
   return parts.filter((part) => !hidden.has(part.pieceId));
 }

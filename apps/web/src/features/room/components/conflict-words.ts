@@ -1,0 +1,87 @@
+import type { FitSheet, RuleBook, VerdictOutcome } from '@settlewright/anthropometry';
+import {
+  parametersOf,
+  type DocumentDifference,
+  type LengthStyle,
+  type SetDocument,
+  type SitterRef,
+} from '@settlewright/geometry';
+import type { CastMember } from '@/lib/contract.ts';
+import { showNumber } from '../numbers.ts';
+import { shortName, sitterName } from '../sitters.ts';
+
+export type Side = 'mine' | 'theirs';
+
+export function nameOf({ mark, label, kind }: DocumentDifference): string {
+  if (kind === 'piece') return label;
+  return mark && !label.includes(mark) ? `${mark}, ${label.charAt(0).toLowerCase()}${label.slice(1)}` : label;
+}
+
+export interface WordsOf {
+  style: LengthStyle;
+  cast: readonly CastMember[];
+  /** Versions in which a parameter's kind and limits can be looked up. */
+  documents: readonly SetDocument[];
+}
+
+function isSitter(value: unknown): value is SitterRef {
+  return typeof value === 'object' && value !== null && 'kind' in value;
+}
+
+/** One side of a difference as a person reads it. */
+export function sayValue(difference: DocumentDifference, value: unknown, words: WordsOf): string {
+  const { kind, key, pieceId } = difference;
+  if (value === undefined || value === null) return kind === 'seating' ? 'nobody' : 'none';
+  if (kind === 'piece') return 'kept';
+  if (kind === 'seating' && isSitter(value)) return sitterName(value, words.cast);
+  if (key === 'at' && typeof value === 'object') return 'moved';
+  for (const document of words.documents) {
+    const piece = document.pieces.find((candidate) => candidate.id === pieceId);
+    const parameter = piece && parametersOf(piece).find((candidate) => candidate.key === key);
+    if (!parameter) continue;
+    if (typeof value === 'number' && typeof parameter.value === 'number') {
+      return showNumber({ ...parameter, value }, words.style);
+    }
+    const choice = parameter.choices?.find((candidate) => candidate.value === value);
+    if (choice) return choice.label;
+  }
+  if (typeof value === 'number' && key?.endsWith('Mm')) {
+    return showNumber({ key, label: '', kind: 'length', unit: 'mm', min: 0, max: 1e5, value }, words.style);
+  }
+  if (typeof value === 'boolean') return value ? 'yes' : 'no';
+  if (typeof value === 'string') return value === '' ? 'empty' : value;
+  return typeof value === 'number' ? String(value) : 'changed';
+}
+
+export interface AffectedVerdict {
+  key: string;
+  who: string;
+  check: string;
+  outcome: VerdictOutcome;
+}
+
+/** Verdicts that a choice decides: those that differ between two versions of the sheet. */
+export function affectedVerdicts(
+  sheet: FitSheet,
+  other: FitSheet,
+  ruleBook: RuleBook,
+  most: number,
+): AffectedVerdict[] {
+  const others = new Map(
+    other.rows.flatMap((row) => row.cells.map((cell) => [`${row.sitterId} ${cell.ruleId}`, cell.outcome])),
+  );
+  return sheet.rows
+    .flatMap((row) =>
+      row.cells.flatMap((cell): AffectedVerdict[] => {
+        const key = `${row.sitterId} ${cell.ruleId}`;
+        const twin = others.get(key);
+        const { outcome } = cell;
+        if (outcome.kind !== 'verdict') return [];
+        if (twin?.kind === 'verdict' && Math.abs(twin.margin - outcome.margin) < 0.05) return [];
+        const check = ruleBook.rule(cell.ruleId).columnName.toLowerCase();
+        return [{ key, who: shortName(row.name), check, outcome }];
+      }),
+    )
+    .sort((a, b) => a.outcome.margin - b.outcome.margin)
+    .slice(0, most);
+}

@@ -1,0 +1,144 @@
+import { Radio, RadioGroup } from '@headlessui/react';
+import { footprint, formatLength, placeFrames, type Piece } from '@settlewright/geometry';
+import { useMemo } from 'react';
+import { Measure } from '@/components/measure.tsx';
+import { RuleHeading } from '@/components/rule-heading.tsx';
+import type { RoomAddress } from '../hooks/use-address.ts';
+import type { RoomPicture } from '../picture.ts';
+import { useSurroundings } from '../room-context.tsx';
+import { VIEW_LETTERS, VIEW_TITLES, type ViewLetter } from '../scene/views.ts';
+import { EyeMark } from './eye-mark.tsx';
+
+const WIDTH = 240;
+const LEFT = 34;
+const BOTTOM = 36;
+const TALLEST = 170;
+const HEAD_MM = 110;
+
+const FILLS: Record<Piece['kind'], string> = {
+  bench: 'var(--color-cloth-2)',
+  'loose-seat': 'var(--color-cloth-1)',
+  table: 'var(--color-oak-1)',
+  sill: 'var(--color-sitter-6)',
+  bulkhead: 'var(--color-oak-3)',
+  overhead: 'none',
+};
+
+/** Lowest first, so that a table lies over the bench it stands in. */
+const ORDER: Piece['kind'][] = ['bulkhead', 'sill', 'bench', 'loose-seat', 'table', 'overhead'];
+
+interface Props {
+  picture: RoomPicture;
+  address: RoomAddress;
+}
+
+/** The plan to scale, with the eyes from which the room can be seen. */
+export function KeyPlan({ picture, address }: Props) {
+  const { style } = useSurroundings();
+  const { document, bodies } = picture;
+  const plan = useMemo(() => planOfSet(document.pieces), [document.pieces]);
+  const { minX, maxX, minZ, maxZ } = plan;
+  const scale = Math.min((WIDTH - LEFT - 6) / (maxX - minX), TALLEST / (maxZ - minZ));
+  const height = (maxZ - minZ) * scale;
+  const x = (mm: number) => LEFT + (mm - minX) * scale;
+  const z = (mm: number) => 8 + (mm - minZ) * scale;
+  const selected = document.pieces.find((piece) => piece.id === address.pieceId);
+  const frames = document.pieces.flatMap((piece) => placeFrames(piece, document));
+  const dots = bodies.flatMap((body) => {
+    const frame = frames.find((candidate) => candidate.placeId === body.placeId);
+    return frame ? [{ id: body.placeId, colour: body.colour, hip: frame.hipMm }] : [];
+  });
+  const cutX = selected ? x(selected.at.xMm) : undefined;
+  const width = (maxX - minX) * scale;
+
+  const eyes: Record<ViewLetter, { left: number; top: number; turn: number }> = {
+    A: { left: LEFT + width / 2, top: height + 26, turn: 0 },
+    B: { left: 15, top: 8 + height / 2, turn: 90 },
+    C: {
+      left: Math.min(Math.max(cutX ?? LEFT + 30, LEFT + 14), LEFT + width / 2 - 32),
+      top: height + 26,
+      turn: 0,
+    },
+    D: { left: LEFT + width - 14, top: height + 26, turn: 0 },
+    E: { left: 15, top: height + 26, turn: 45 },
+  };
+
+  return (
+    <section aria-labelledby="plan-heading">
+      <RuleHeading
+        id="plan-heading"
+        aside={
+          <span className="text-sm text-ink-3">
+            <Measure text={formatLength(maxX - minX, { ...style, feet: true })} />
+          </span>
+        }
+      >
+        Key plan
+      </RuleHeading>
+      <RadioGroup
+        value={address.view}
+        onChange={address.show}
+        aria-label="View"
+        className="relative"
+        style={{ width: WIDTH, height: height + BOTTOM + 10 }}
+      >
+        <svg width={WIDTH} height={height + BOTTOM} aria-hidden="true" className="tape absolute inset-0">
+          {ORDER.flatMap((kind) => document.pieces.filter((piece) => piece.kind === kind)).map((piece) => (
+            <polygon
+              key={piece.id}
+              points={footprint(piece)
+                .corners.map(([cx, cz]) => `${x(cx).toFixed(1)},${z(cz).toFixed(1)}`)
+                .join(' ')}
+              fill={FILLS[piece.kind]}
+              stroke={piece.id === address.pieceId ? 'var(--color-ink)' : 'var(--color-pen)'}
+              strokeWidth={piece.id === address.pieceId ? 2.5 : 1}
+              strokeDasharray={piece.kind === 'overhead' ? '4 3' : undefined}
+            />
+          ))}
+          {dots.map((dot) => (
+            <circle
+              key={dot.id}
+              cx={x(dot.hip[0])}
+              cy={z(dot.hip[2])}
+              r={Math.max(3.5, HEAD_MM * scale)}
+              fill={`var(--color-sitter-${dot.colour})`}
+              stroke="var(--color-pen)"
+            />
+          ))}
+          {cutX !== undefined && address.view === 'C' && (
+            <path
+              d={`M${cutX} 2V${height + 14}`}
+              stroke="var(--color-ink)"
+              strokeWidth="1.25"
+              strokeDasharray="7 3 1.5 3"
+            />
+          )}
+        </svg>
+        {VIEW_LETTERS.map((letter) => (
+          <Radio
+            key={letter}
+            value={letter}
+            aria-label={`${letter}, ${VIEW_TITLES[letter].toLowerCase()}`}
+            title={VIEW_TITLES[letter]}
+            className="quick absolute flex size-[30px] -translate-1/2 cursor-pointer items-center justify-center rounded-sm data-focus:shadow-(--focus-ring)"
+            style={{ left: eyes[letter].left, top: eyes[letter].top }}
+          >
+            <EyeMark letter={letter} chosen={letter === address.view} turnDeg={eyes[letter].turn} />
+          </Radio>
+        ))}
+      </RadioGroup>
+    </section>
+  );
+}
+
+function planOfSet(pieces: readonly Piece[]) {
+  const corners = pieces.flatMap((piece) => footprint(piece).corners);
+  const xs = corners.map(([cx]) => cx);
+  const zs = corners.map(([, cz]) => cz);
+  return {
+    minX: Math.min(...xs, 0),
+    maxX: Math.max(...xs, 100),
+    minZ: Math.min(...zs, 0),
+    maxZ: Math.max(...zs, 100),
+  };
+}

@@ -1,0 +1,126 @@
+import type { SetDocument } from '@settlewright/geometry';
+import { useState } from 'react';
+import { Button } from '@/components/button.tsx';
+import { Dialog } from '@/components/dialog.tsx';
+import { RuleHeading } from '@/components/rule-heading.tsx';
+import { TextArea } from '@/components/text-field.tsx';
+import { useSurroundings } from '../room-context.tsx';
+
+interface Props {
+  document: SetDocument;
+  onReplace: (document: SetDocument, step: string) => void;
+}
+
+const SHOWN = 4;
+
+/** The honest list of where the build departs from what it copies. */
+export function KnownDifferences({ document, onReplace }: Props) {
+  const { canEdit } = useSurroundings();
+  const [open, setOpen] = useState(false);
+  const list = document.knownDifferences;
+  return (
+    <section aria-labelledby="differences-heading">
+      <RuleHeading
+        id="differences-heading"
+        aside={
+          <Button look="word" onClick={() => setOpen(true)}>
+            {list.length > 0 || !canEdit ? list.length : 'Add'}
+            <span className="sr-only"> known differences, open the list</span>
+          </Button>
+        }
+      >
+        Known differences
+      </RuleHeading>
+      <p className="text-sm text-ink-2">
+        {list.length === 0
+          ? 'None written down.'
+          : list
+              .slice(0, SHOWN)
+              .map(({ text }) => text.replace(/[.\s]*$/, '.'))
+              .join(' ')}
+        {list.length > SHOWN && ` And ${list.length - SHOWN} more.`}
+      </p>
+      <Dialog
+        open={open}
+        onClose={() => setOpen(false)}
+        title="Known differences"
+        describe="Where the build departs from the reference, knowingly. Issued with every revision."
+      >
+        <ol className="grid gap-4">
+          {list.map((difference, n) => (
+            <li key={difference.id} className="flex items-end gap-3">
+              <TextArea
+                className="flex-1"
+                label={`Difference ${n + 1}`}
+                defaultValue={difference.text}
+                maxLength={1000}
+                rows={2}
+                disabled={!canEdit}
+                onBlur={(event) => {
+                  const text = event.target.value.trim();
+                  if (text === difference.text || text === '') return;
+                  onReplace(
+                    {
+                      ...document,
+                      knownDifferences: list.map((old) =>
+                        old.id === difference.id ? { ...old, text } : old,
+                      ),
+                    },
+                    `Known difference ${n + 1} reworded`,
+                  );
+                }}
+              />
+              {canEdit && (
+                <Button
+                  look="word"
+                  onClick={() =>
+                    onReplace(
+                      { ...document, knownDifferences: list.filter((old) => old.id !== difference.id) },
+                      `Known difference ${n + 1} removed`,
+                    )
+                  }
+                >
+                  Remove<span className="sr-only"> difference {n + 1}</span>
+                </Button>
+              )}
+            </li>
+          ))}
+        </ol>
+        {canEdit && <AddDifference document={document} onReplace={onReplace} />}
+      </Dialog>
+    </section>
+  );
+}
+
+function AddDifference({ document, onReplace }: Props) {
+  const [text, setText] = useState('');
+  return (
+    <form
+      className="mt-5 grid gap-3"
+      onSubmit={(event) => {
+        event.preventDefault();
+        if (text.trim() === '') return;
+        const added = { id: crypto.randomUUID(), text: text.trim() };
+        onReplace(
+          { ...document, knownDifferences: [...document.knownDifferences, added] },
+          'Known difference added',
+        );
+        setText('');
+      }}
+    >
+      <TextArea
+        label="Another one"
+        description="For example: the sill is 1″ higher than in the photograph."
+        value={text}
+        maxLength={1000}
+        rows={2}
+        onChange={(event) => setText(event.target.value)}
+      />
+      <div>
+        <Button type="submit" size="small">
+          Add it
+        </Button>
+      </div>
+    </form>
+  );
+}

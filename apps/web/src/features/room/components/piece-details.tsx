@@ -1,0 +1,98 @@
+import { placeFrames, type Piece, type SetDocument } from '@settlewright/geometry';
+import { useState } from 'react';
+import { Button } from '@/components/button.tsx';
+import { Menu } from '@/components/menu.tsx';
+import type { PieceActions } from '../hooks/use-piece-actions.ts';
+import { useSurroundings } from '../room-context.tsx';
+import { shortName, sitterName } from '../sitters.ts';
+import { NumbersDialog } from './numbers-dialog.tsx';
+import { PlacesDialog } from './places-dialog.tsx';
+
+interface Props {
+  piece: Piece;
+  document: SetDocument;
+  actions: PieceActions;
+}
+
+/** What the row of the selected piece opens: who sits there, and what can be done. */
+export function PieceDetails({ piece, document, actions }: Props) {
+  const { cast, canEdit } = useSurroundings();
+  const [open, setOpen] = useState<'numbers' | 'places' | null>(null);
+  const frames = placeFrames(piece, document);
+  const seated = document.seating
+    .filter((seat) => seat.pieceId === piece.id)
+    .sort((a, b) => a.place - b.place)
+    .map((seat) => `${seat.place} ${shortName(sitterName(seat.sitter, cast))}`);
+  return (
+    <div className="text-xs leading-5 text-ink-2">
+      {frames.length > 0 && (
+        <p>
+          {frames.length === 1 ? 'Place ' : 'Places '}
+          {seated.length > 0 ? seated.join(', ') : 'all empty'}
+          {canEdit && (
+            <>
+              {' '}
+              <Button look="word" className="text-xs!" onClick={() => setOpen('places')}>
+                Seat people
+              </Button>
+            </>
+          )}
+        </p>
+      )}
+      <p className="flex flex-wrap items-center gap-x-3">
+        <Button look="word" className="text-xs!" onClick={() => setOpen('numbers')}>
+          All numbers
+        </Button>
+        {canEdit && (
+          <Menu
+            name={`More of ${piece.mark}, menu`}
+            button="More"
+            buttonClassName="link min-h-6"
+            entries={moreEntries(piece, document, actions)}
+          />
+        )}
+      </p>
+      <NumbersDialog
+        piece={piece}
+        actions={actions}
+        open={open === 'numbers'}
+        onClose={() => setOpen(null)}
+      />
+      <PlacesDialog
+        piece={piece}
+        document={document}
+        actions={actions}
+        open={open === 'places'}
+        onClose={() => setOpen(null)}
+      />
+    </div>
+  );
+}
+
+function moreEntries(piece: Piece, document: SetDocument, actions: PieceActions) {
+  const like = document.pieces.filter((other) => other.kind === piece.kind).map((other) => other.id);
+  const ids = [piece.id, ...like.filter((id) => id !== piece.id)];
+  return [
+    { id: 'copy', words: 'Copy', onPress: () => actions.duplicate(piece) },
+    { id: 'left', words: 'Turn 15° left', disabled: piece.locked, onPress: () => actions.turn(piece, 15) },
+    { id: 'right', words: 'Turn 15° right', disabled: piece.locked, onPress: () => actions.turn(piece, -15) },
+    {
+      id: 'align-back',
+      words: `Line up all of its kind at the back`,
+      disabled: ids.length < 2,
+      onPress: () => actions.align(ids, 'back'),
+    },
+    {
+      id: 'lock',
+      words: piece.locked ? 'Unlock its place' : 'Lock its place',
+      onPress: () => actions.setFlag(piece, 'locked', !piece.locked),
+    },
+    {
+      id: 'accessible',
+      words: piece.accessible ? 'No longer accessible' : 'Mark as accessible',
+      detail: piece.accessible ? undefined : 'asks the clauses',
+      onPress: () => actions.setFlag(piece, 'accessible', !piece.accessible),
+    },
+    { id: 'remove', words: `Remove ${piece.mark}`, onPress: () => actions.remove(piece) },
+  ];
+}

@@ -1,0 +1,99 @@
+import { formatLength, type Piece, type SetDocument } from '@settlewright/geometry';
+import { useMemo, type ReactNode } from 'react';
+import { classNames } from '@/components/class-names.ts';
+import { MarkTag, timberOf } from '@/components/mark-tag.tsx';
+import { Measure } from '@/components/measure.tsx';
+import { Menu } from '@/components/menu.tsx';
+import { RuleHeading } from '@/components/rule-heading.tsx';
+import { KIND_WORDS, type PieceActions } from '../hooks/use-piece-actions.ts';
+import { useSurroundings } from '../room-context.tsx';
+import { PieceDetails } from './piece-details.tsx';
+
+const KINDS = ['bench', 'table', 'loose-seat', 'sill', 'bulkhead', 'overhead'] as const;
+
+/** The length of a piece as its row shows it. */
+function lengthOf(piece: Piece): number {
+  return piece.kind === 'loose-seat' ? piece.widthMm : piece.lengthMm;
+}
+
+interface Props {
+  document: SetDocument;
+  selectedPieceId: string | undefined;
+  onSelect: (pieceId: string | undefined) => void;
+  actions: PieceActions;
+  /** Filled by the page: the order that a piece's cushions are in. */
+  aboutPiece?: (piece: Piece) => ReactNode;
+}
+
+/** The schedule of pieces: mark, name, length; the selected one opens. */
+export function PiecesPanel({ document, selectedPieceId, onSelect, actions, aboutPiece }: Props) {
+  const { canEdit, style } = useSurroundings();
+  const entries = useMemo(
+    () =>
+      KINDS.map((kind) => ({
+        id: kind,
+        words: KIND_WORDS[kind].replace(/^./, (letter) => letter.toUpperCase()),
+        onPress: () => actions.add(kind),
+      })),
+    [actions],
+  );
+  return (
+    <section aria-labelledby="pieces-heading">
+      <RuleHeading
+        id="pieces-heading"
+        aside={
+          canEdit && (
+            <Menu
+              name="Add a piece, menu"
+              button="Add"
+              buttonClassName="link text-sm"
+              entries={entries}
+              side="end"
+            />
+          )
+        }
+      >
+        Pieces
+      </RuleHeading>
+      {document.pieces.length === 0 && <p className="text-sm text-ink-2">None yet.</p>}
+      <ul className="border-t-[1.25px] border-ink">
+        {document.pieces.map((piece) => {
+          const selected = piece.id === selectedPieceId;
+          return (
+            <li
+              key={piece.id}
+              className={classNames('border-b', selected ? 'border-b-[1.5px] border-ink' : 'border-rule')}
+            >
+              <button
+                type="button"
+                aria-current={selected || undefined}
+                data-piece={piece.mark}
+                onClick={() => onSelect(selected ? undefined : piece.id)}
+                className="quick flex min-h-9 w-full items-center gap-3 py-1 text-left hover:bg-sunk"
+              >
+                <MarkTag mark={piece.mark} timber={timberOf(piece.kind)} selected={selected} />
+                <span
+                  className={classNames(
+                    'min-w-0 flex-1 truncate text-[0.94rem]',
+                    selected && 'font-semibold',
+                  )}
+                >
+                  {piece.name || KIND_WORDS[piece.kind]}
+                </span>
+                <span className={classNames('pr-1 text-sm', selected && 'font-semibold')}>
+                  <Measure text={formatLength(lengthOf(piece), { ...style, feet: true })} />
+                </span>
+              </button>
+              {selected && (
+                <div className="pb-2.5 pl-1">
+                  <PieceDetails piece={piece} document={document} actions={actions} />
+                  {aboutPiece?.(piece)}
+                </div>
+              )}
+            </li>
+          );
+        })}
+      </ul>
+    </section>
+  );
+}

@@ -1,0 +1,191 @@
+import { tapeLines, type Piece } from '@settlewright/geometry';
+import { lazy, Suspense, useId, useMemo, useRef, useState, type KeyboardEvent } from 'react';
+import { LoadingLine } from '@/components/loading.tsx';
+import { useTheme } from '@/lib/theme.ts';
+import type { PieceActions } from '../hooks/use-piece-actions.ts';
+import { useSceneHand } from '../hooks/use-scene-hand.ts';
+import { useView } from '../hooks/use-view.ts';
+import type { RoomAddress } from '../hooks/use-address.ts';
+import { Overlay } from '../overlay/overlay.tsx';
+import { tapesAtRest } from '../overlay/tape-words.ts';
+import type { RoomPicture } from '../picture.ts';
+import { useSurroundings } from '../room-context.tsx';
+import { isBehind, isToScale, VIEW_TITLES } from '../scene/views.ts';
+import { useRoom } from '../store.ts';
+import { EyeMark } from './eye-mark.tsx';
+import { SceneErrorBoundary } from './scene-error-boundary.tsx';
+import { ScaleBar } from './scale-bar.tsx';
+import { Toggle } from './toggle.tsx';
+import { TextTwin } from './text-twin.tsx';
+
+/** The drawing has no frame: it fades into the paper at the edges of the sheet. */
+const FADE = {
+  maskImage:
+    'linear-gradient(90deg, transparent, #000 4%, #000 96%, transparent), linear-gradient(transparent, #000 8%, #000 93%, transparent)',
+  maskComposite: 'intersect',
+};
+
+const SceneCanvas = lazy(() => import('../scene/scene-canvas.tsx'));
+
+interface Props {
+  picture: RoomPicture;
+  piece: Piece | undefined;
+  address: RoomAddress;
+  actions: PieceActions;
+  onOpenCell: (cellId: string) => void;
+}
+
+/** The drawing, what stands over it and what can be done to it. */
+export function SceneStage({ picture, piece, address, actions, onOpenCell }: Props) {
+  const { style, canEdit } = useSurroundings();
+  const theme = useTheme((state) => state.choice);
+  const lit = useRoom((state) => state.litCellId);
+  const sheet = useRef<HTMLDivElement>(null);
+  const about = useId();
+  const [showBodies, setShowBodies] = useState(true);
+  const [showTapes, setShowTapes] = useState(true);
+  const { view: letter, clientView } = address;
+  const view = useView(picture, letter, address.pieceId, sheet);
+  const hand = useSceneHand({ picture, view, letter, onSelect: address.select });
+
+  const tapes = useMemo(
+    () => tapeLines(picture.document, picture.sheet, address.pieceId),
+    [picture, address.pieceId],
+  );
+  const shown =
+    showTapes && !clientView
+      ? tapesAtRest(tapes, picture.sheet, address.pieceId, lit, view.narrow ? 2 : 12)
+      : [];
+  const bodies = showBodies ? picture.bodies.filter((body) => isBehind(body.crownMm, view.cut)) : [];
+
+  function keys(event: KeyboardEvent<HTMLDivElement>) {
+    if (event.target !== event.currentTarget) return;
+    if (event.key === 'Escape') {
+      hand.cancel();
+      if (!hand.isDragging()) address.select(undefined);
+      return;
+    }
+    if (event.ctrlKey || event.metaKey || !piece || !canEdit) return;
+    const size = event.shiftKey ? 8 : 1;
+    const moves: Record<string, [number, number]> = {
+      ArrowLeft: [-size, 0],
+      ArrowRight: [size, 0],
+      ArrowUp: [0, -size],
+      ArrowDown: [0, size],
+    };
+    const move = moves[event.key];
+    if (move && !piece.locked) actions.nudge(piece, ...move);
+    else if (event.key === ',' && !piece.locked) actions.turn(piece, 15);
+    else if (event.key === '.' && !piece.locked) actions.turn(piece, -15);
+    else if (event.key === 'Delete' || event.key === 'Backspace') actions.remove(piece);
+    else return;
+    event.preventDefault();
+  }
+
+  return (
+    <section aria-label="Drawing of the set" className="flex min-h-0 flex-1 flex-col">
+      <div className="flex min-h-9 items-center gap-3">
+        <EyeMark letter={letter} chosen />
+        <div>
+          <p className="text-sm leading-4 font-medium">{VIEW_TITLES[letter]}</p>
+          <p className="text-xs text-ink-3">{isToScale(letter) ? 'to scale' : 'sizes on the tapes govern'}</p>
+        </div>
+      </div>
+      <div
+        ref={sheet}
+        role="application"
+        aria-roledescription="drawing"
+        aria-label={`${VIEW_TITLES[letter]}. ${piece ? `${piece.mark} selected.` : 'Nothing selected.'}`}
+        aria-describedby={about}
+        tabIndex={0}
+        data-scene={letter}
+        data-scene-pieces={picture.document.pieces.length}
+        data-scene-sitters={bodies.length}
+        data-scene-parts={picture.parts.length}
+        onKeyDown={keys}
+        onWheel={(event) => {
+          if (event.ctrlKey) view.zoomBy(event.deltaY < 0 ? 1.1 : 1 / 1.1);
+        }}
+        {...hand.handlers}
+        className="relative min-h-0 flex-1 touch-pan-y overflow-hidden outline-offset-[-2px] select-none max-tablet:h-[21rem] max-tablet:flex-none"
+      >
+        <SceneErrorBoundary>
+          <div className="absolute inset-0" style={FADE}>
+            <Suspense fallback={<LoadingLine words="Drawing the set" />}>
+              <SceneCanvas
+                picture={picture}
+                controller={view.controller}
+                letter={letter}
+                cut={view.cut}
+                selectedPieceId={clientView ? undefined : address.pieceId}
+                showBodies={showBodies}
+                theme={theme}
+                report={({ calls, triangles }) => {
+                  sheet.current?.setAttribute('data-scene-calls', String(calls));
+                  sheet.current?.setAttribute('data-scene-triangles', String(triangles));
+                }}
+              />
+            </Suspense>
+          </div>
+        </SceneErrorBoundary>
+        <Overlay
+          controller={view.controller}
+          bodies={bodies}
+          tapes={shown}
+          style={style}
+          litCellId={lit}
+          selectedPieceId={address.pieceId}
+          onSelectPiece={address.select}
+          onOpenCell={onOpenCell}
+        />
+        {isToScale(letter) && <ScaleBar controller={view.controller} style={style} />}
+      </div>
+      <div className="flex flex-wrap items-center justify-end gap-x-5 gap-y-1 py-1.5 text-sm text-ink-2">
+        <Toggle on={showBodies} onChange={setShowBodies}>
+          Bodies
+        </Toggle>
+        <Toggle on={showTapes} onChange={setShowTapes}>
+          Tapes
+        </Toggle>
+        <Toggle on={clientView} onChange={address.setClientView}>
+          Client view
+        </Toggle>
+        <span className="flex items-center gap-1 border-l border-ink pl-3">
+          <ZoomButton name="Smaller" onPress={() => view.zoomBy(1 / 1.25)}>
+            −
+          </ZoomButton>
+          <ZoomButton name="Fit the set into the sheet" onPress={view.fit}>
+            Fit
+          </ZoomButton>
+          <ZoomButton name="Larger" onPress={() => view.zoomBy(1.25)}>
+            +
+          </ZoomButton>
+          {letter === 'E' && (
+            <>
+              <ZoomButton name="Walk to the left" onPress={() => view.turnBy(-0.26, 0)}>
+                ←
+              </ZoomButton>
+              <ZoomButton name="Walk to the right" onPress={() => view.turnBy(0.26, 0)}>
+                →
+              </ZoomButton>
+            </>
+          )}
+        </span>
+      </div>
+      <TextTwin id={about} picture={picture} tapes={clientView ? [] : tapes} onOpenCell={onOpenCell} />
+    </section>
+  );
+}
+
+function ZoomButton({ name, onPress, children }: { name: string; onPress: () => void; children: string }) {
+  return (
+    <button
+      type="button"
+      aria-label={name}
+      onClick={onPress}
+      className="quick min-h-8 min-w-8 rounded-sm px-1.5 font-medium hover:bg-sunk hover:text-ink"
+    >
+      {children}
+    </button>
+  );
+}

@@ -1,0 +1,44 @@
+import type { TapeLine } from '@settlewright/geometry';
+import { sayTape } from '../overlay/tape-words.ts';
+import type { RoomPicture } from '../picture.ts';
+import { useSurroundings } from '../room-context.tsx';
+import { sayPlaces } from './say-places.ts';
+
+interface Props {
+  id: string;
+  picture: RoomPicture;
+  tapes: readonly TapeLine[];
+  onOpenCell: (cellId: string) => void;
+}
+
+/** What the drawing shows, for those who do not see it: pieces, bodies and every tape by its full name. */
+export function TextTwin({ id, picture, tapes, onOpenCell }: Props) {
+  const { style } = useSurroundings();
+  const { document, bodies } = picture;
+  return (
+    <div className="sr-only">
+      <p id={id}>
+        {document.pieces.length === 0
+          ? 'The set is empty.'
+          : `Shows ${document.pieces.map((piece) => `${piece.mark} ${piece.name}`).join(', ')}.`}{' '}
+        {sayPlaces(document, bodies)} Arrow keys move the selected piece, comma and full stop turn it, Delete
+        removes it. Sizes are listed below.
+      </p>
+      {tapes.length > 0 && (
+        <ul aria-label="Tapes of the drawing">
+          {tapes.map((tape) => (
+            <li key={tape.id}>
+              {tape.cellId === undefined ? (
+                sayTape(tape, style)
+              ) : (
+                <button type="button" tabIndex={-1} onClick={() => onOpenCell(tape.cellId ?? '')}>
+                  {sayTape(tape, style)}, open the check
+                </button>
+              )}
+            </li>
+          ))}
+        </ul>
+      )}
+    </div>
+  );
+}

@@ -1,0 +1,63 @@
+import { parametersOf, setParameter, type SetDocument } from '@settlewright/geometry';
+import { useCallback } from 'react';
+import { announce } from '@/lib/announce.ts';
+import { sayNumber, showNumber, type NumberParameter } from '../numbers.ts';
+import { useSurroundings } from '../room-context.tsx';
+import { useRoomStore } from '../store.ts';
+import { changedVerdicts } from '../verdict-words.ts';
+
+export interface ChangeNumber {
+  /** Shows the set with another value, without a step. */
+  preview: (value: number | null) => void;
+  /** Takes the value as one named step; returns the reason when it cannot be. */
+  commit: (value: number) => string | undefined;
+}
+
+/** Changes one number of one piece, by whatever control it is typed in. */
+export function useChangeNumber(pieceId: string, parameter: NumberParameter): ChangeNumber {
+  const store = useRoomStore();
+  const { maker, engine, style } = useSurroundings();
+  const { key } = parameter;
+
+  const preview = useCallback(
+    (value: number | null) => {
+      const { document, showPreview } = store.getState();
+      if (value === null) {
+        showPreview(null);
+        return;
+      }
+      const changed = setParameter(document, pieceId, key, value);
+      if (changed.ok) showPreview(changed.value);
+    },
+    [store, pieceId, key],
+  );
+
+  const commit = useCallback(
+    (value: number) => {
+      const { document, showPreview } = store.getState();
+      const piece = document.pieces.find((candidate) => candidate.id === pieceId);
+      const before = piece && parametersOf(piece).find((candidate) => candidate.key === key);
+      if (!piece || !before || typeof before.value !== 'number') return undefined;
+      if (Math.abs(before.value - value) < 1e-9) {
+        showPreview(null);
+        return undefined;
+      }
+      const changed = setParameter(document, pieceId, key, value);
+      if (!changed.ok) return changed.error.message;
+      takeStep(document, changed.value, { ...before, value: before.value }, piece.mark);
+      return undefined;
+
+      function takeStep(old: SetDocument, next: SetDocument, was: NumberParameter, mark: string) {
+        const label = was.label.charAt(0).toLowerCase() + was.label.slice(1);
+        const [from, to] = [showNumber(was, style), showNumber(was, style, value)];
+        store.getState().commit(next, `${mark} ${label} ${from} to ${to}`);
+        const verdicts = changedVerdicts(maker.check(old), maker.check(next), engine.ruleBook);
+        const words = [`${was.label} ${sayNumber(was, style, value)}`, ...verdicts];
+        announce(`${words.join('. ')}.`);
+      }
+    },
+    [store, pieceId, key, maker, engine, style],
+  );
+
+  return { preview, commit };
+}

@@ -1,0 +1,69 @@
+import { useMemo } from 'react';
+import { useStore } from 'zustand';
+import { useTitleCells, type TitleCell } from '@/lib/title-cells.ts';
+import { useAutosave, useSurroundings } from '../room-context.tsx';
+import { useUndo } from '../store.ts';
+
+/** The room's cells of the title block: set, draft, undo and redo by name. */
+export function useRoomCells(lastRevision: string | undefined): void {
+  const { path, setName, canEdit } = useSurroundings();
+  const autosave = useAutosave();
+  const number = useStore(autosave.state, (state) => state.base.number);
+  const { undo, redo, undoStep, redoStep } = useUndo();
+  const home = `/w/${path.workshopId}/p/${path.productionId}/sets/${path.setId}`;
+
+  const cells = useMemo<TitleCell[]>(() => {
+    const where: TitleCell[] = [
+      {
+        id: 'set',
+        side: 'left',
+        order: 30,
+        label: 'Set',
+        value: setName,
+        phone: true,
+        menu: [
+          { id: 'room', words: 'The room', to: home },
+          { id: 'fit', words: 'Fit sheet', to: `${home}/fit` },
+          { id: 'revisions', words: 'Revisions', to: `${home}/revisions` },
+        ],
+        name: `Set: ${setName}, menu`,
+      },
+      {
+        id: 'draft',
+        side: 'left',
+        order: 40,
+        label: 'Draft',
+        value: lastRevision ? `${number}, after revision ${lastRevision}` : `${number}, nothing issued`,
+        to: `${home}/revisions`,
+      },
+    ];
+    if (!canEdit) return where;
+    return [
+      ...where,
+      {
+        id: 'undo',
+        side: 'right',
+        order: 10,
+        label: 'Undo',
+        value: undo ?? 'nothing',
+        name: `Undo ${undo ?? 'nothing'}`,
+        disabled: undo === undefined,
+        onPress: undoStep,
+        phone: true,
+      },
+      {
+        id: 'redo',
+        side: 'right',
+        order: 20,
+        label: 'Redo',
+        value: redo ?? 'nothing',
+        name: `Redo ${redo ?? 'nothing'}`,
+        disabled: redo === undefined,
+        onPress: redoStep,
+      },
+    ];
+    // The two steps act on the store, whatever render made them.
+    // eslint-disable-next-line react-hooks/exhaustive-deps
+  }, [setName, home, number, lastRevision, canEdit, undo, redo]);
+  useTitleCells(cells);
+}

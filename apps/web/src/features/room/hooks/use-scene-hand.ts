@@ -1,0 +1,139 @@
+import { movePiece, snapPiece, type Piece, type SetDocument } from '@settlewright/geometry';
+import { useEffect, useRef, type PointerEvent } from 'react';
+import { announce } from '@/lib/announce.ts';
+import type { RoomPicture } from '../picture.ts';
+import { useSurroundings } from '../room-context.tsx';
+import { onLevel, pieceUnder } from '../scene/pick.ts';
+import { turn } from '../scene/vectors.ts';
+import { pixelsPerMm, rayThrough } from '../scene/view-frame.ts';
+import type { ViewLetter } from '../scene/views.ts';
+import { visibleParts } from '../scene/visible-parts.ts';
+import { useRoomStore } from '../store.ts';
+import type { View } from './use-view.ts';
+
+const DRAG_STARTS_PX = 5;
+
+interface Drag {
+  pointerId: number;
+  startX: number;
+  startY: number;
+  lastX: number;
+  lastY: number;
+  moving: boolean;
+  /** The piece in the hand; without one the sheet itself is moved. */
+  piece: Piece | undefined;
+  base: SetDocument;
+  floor: { xMm: number; zMm: number } | undefined;
+}
+
+/** Clicking, dragging pieces over the floor, and moving the sheet: kept out of React until let go. */
+export function useSceneHand(options: {
+  picture: RoomPicture;
+  view: View;
+  letter: ViewLetter;
+  onSelect: (pieceId: string | undefined) => void;
+}) {
+  const { picture, view, letter, onSelect } = options;
+  const store = useRoomStore();
+  const { canEdit } = useSurroundings();
+  const drag = useRef<Drag | null>(null);
+  const wanted = useRef<SetDocument | null>(null);
+  const request = useRef(0);
+
+  useEffect(() => () => cancelAnimationFrame(request.current), []);
+
+  function at(event: PointerEvent<HTMLElement>) {
+    const box = event.currentTarget.getBoundingClientRect();
+    return { x: event.clientX - box.left, y: event.clientY - box.top };
+  }
+
+  function rayAt(x: number, y: number) {
+    const frame = view.controller.frame();
+    return frame && rayThrough(frame, view.controller.viewport(), x, y);
+  }
+
+  function down(event: PointerEvent<HTMLElement>) {
+    if (event.button !== 0 || event.target instanceof HTMLButtonElement) return;
+    const { x, y } = at(event);
+    const ray = rayAt(x, y);
+    if (!ray) return;
+    const parts = visibleParts(picture.document, picture.parts, letter);
+    const pieceId = pieceUnder(parts, ray);
+    const piece = picture.document.pieces.find((candidate) => candidate.id === pieceId);
+    drag.current = {
+      pointerId: event.pointerId,
+      startX: x,
+      startY: y,
+      lastX: x,
+      lastY: y,
+      moving: false,
+      piece: canEdit && piece && !piece.locked && piece.kind !== 'bulkhead' ? piece : undefined,
+      base: store.getState().document,
+      floor: onLevel(ray, 0),
+    };
+    event.currentTarget.setPointerCapture(event.pointerId);
+    onSelect(pieceId);
+  }
+
+  /** Where the piece would stand: over the floor where it is seen from above, else along the sheet. */
+  function shift(hand: Drag, x: number, y: number) {
+    const frame = view.controller.frame();
+    const ray = rayAt(x, y);
+    if (!frame || !ray) return undefined;
+    const floor = onLevel(ray, 0);
+    if (hand.floor && floor && letter !== 'B' && letter !== 'C') {
+      return { x: floor.xMm - hand.floor.xMm, z: floor.zMm - hand.floor.zMm };
+    }
+    const along = (x - hand.startX) / pixelsPerMm(frame, view.controller.viewport());
+    const right = turn(frame.orientation, [1, 0, 0]);
+    return { x: right[0] * along, z: right[2] * along };
+  }
+
+  function move(event: PointerEvent<HTMLElement>) {
+    const hand = drag.current;
+    if (!hand || hand.pointerId !== event.pointerId) return;
+    const { x, y } = at(event);
+    if (!hand.moving && Math.hypot(x - hand.startX, y - hand.startY) < DRAG_STARTS_PX) return;
+    hand.moving = true;
+    if (hand.piece) {
+      const by = shift(hand, x, y);
+      if (!by) return;
+      const { piece, base } = hand;
+      const to = { xMm: piece.at.xMm + by.x, zMm: piece.at.zMm + by.z, turnDeg: piece.at.turnDeg };
+      const snapped = event.altKey ? to : snapPiece(base, piece.id, to).at;
+      wanted.current = movePiece(base, piece.id, snapped);
+      cancelAnimationFrame(request.current);
+      request.current = requestAnimationFrame(() => store.getState().showPreview(wanted.current));
+    } else if (letter === 'E') {
+      view.turnBy(-(x - hand.lastX) * 0.008, (y - hand.lastY) * 0.006);
+    } else {
+      view.panBy(x - hand.lastX, y - hand.lastY);
+    }
+    hand.lastX = x;
+    hand.lastY = y;
+  }
+
+  function end() {
+    cancelAnimationFrame(request.current);
+    const hand = drag.current;
+    drag.current = null;
+    if (hand?.piece && hand.moving && wanted.current) {
+      store.getState().commit(wanted.current, `${hand.piece.mark} moved`);
+      announce(`${hand.piece.mark} moved`);
+    }
+    wanted.current = null;
+  }
+
+  function cancel() {
+    cancelAnimationFrame(request.current);
+    if (drag.current?.piece) store.getState().showPreview(null);
+    drag.current = null;
+    wanted.current = null;
+  }
+
+  return {
+    isDragging: () => drag.current?.moving === true,
+    cancel,
+    handlers: { onPointerDown: down, onPointerMove: move, onPointerUp: end, onPointerCancel: cancel },
+  };
+}

@@ -1,0 +1,65 @@
+import { useEffect } from 'react';
+import { create } from 'zustand';
+import { VIEW_LETTERS, type ViewLetter } from '../scene/views.ts';
+
+const KEY = 'settlewright.single-keys';
+
+function readChoice(): boolean {
+  try {
+    return localStorage.getItem(KEY) !== 'off';
+  } catch {
+    return true;
+  }
+}
+
+/** Whether letters alone do something; some people type by voice or with a switch. */
+export const useSingleKeys = create<{ on: boolean }>(() => ({ on: readChoice() }));
+
+export function chooseSingleKeys(on: boolean): void {
+  try {
+    localStorage.setItem(KEY, on ? 'on' : 'off');
+  } catch {
+    // The choice then lasts as long as the page.
+  }
+  useSingleKeys.setState({ on });
+}
+
+export interface ShortcutActions {
+  undo: () => void;
+  redo: () => void;
+  toggleFit: () => void;
+  show: (letter: ViewLetter) => void;
+  help: () => void;
+}
+
+const isTyping = (target: EventTarget | null): boolean =>
+  target instanceof HTMLElement &&
+  (target.isContentEditable || target.matches('input, textarea, select, [role="listbox"], [role="menu"] *'));
+
+/** Keys of the whole page; none while something is typed or a dialog is open. */
+export function useShortcuts(actions: ShortcutActions): void {
+  const on = useSingleKeys((state) => state.on);
+  useEffect(() => {
+    const listen = (event: KeyboardEvent) => {
+      if (event.defaultPrevented || isTyping(event.target)) return;
+      if (document.querySelector('[role="dialog"]')) return;
+      const key = event.key.toLowerCase();
+      if ((event.ctrlKey || event.metaKey) && !event.altKey) {
+        if (key === 'z') (event.shiftKey ? actions.redo : actions.undo)();
+        else if (key === 'y') actions.redo();
+        else return;
+        event.preventDefault();
+        return;
+      }
+      if (!on || event.altKey) return;
+      const letter = VIEW_LETTERS.find((candidate) => candidate === event.key.toUpperCase());
+      if (key === 'f') actions.toggleFit();
+      else if (event.key === '?') actions.help();
+      else if (letter) actions.show(letter);
+      else return;
+      event.preventDefault();
+    };
+    window.addEventListener('keydown', listen);
+    return () => window.removeEventListener('keydown', listen);
+  }, [actions, on]);
+}

@@ -1,0 +1,160 @@
+import { formatLength, type LengthStyle, type TapeLine } from '@settlewright/geometry';
+import { useCallback, useEffect, useLayoutEffect, useRef } from 'react';
+import { classNames } from '@/components/class-names.ts';
+import { Measure } from '@/components/measure.tsx';
+import type { SeatedBody } from '../picture.ts';
+import { shortName } from '../sitters.ts';
+import type { ViewController } from '../scene/view-controller.ts';
+import { placeFlags, placeNames, tapePath } from './layout.ts';
+import { TapeFlag } from './tape-flag.tsx';
+import { tapeTone } from './tape-words.ts';
+
+interface Props {
+  controller: ViewController;
+  bodies: readonly SeatedBody[];
+  tapes: readonly TapeLine[];
+  style: LengthStyle;
+  litCellId: string | null;
+  selectedPieceId: string | undefined;
+  onSelectPiece: (pieceId: string) => void;
+  onOpenCell: (cellId: string) => void;
+}
+
+const LINE_TONES = {
+  chalk: 'stroke-chalk',
+  ink: 'stroke-ink',
+  fits: 'stroke-fits',
+  tight: 'stroke-tight',
+  wont: 'stroke-wont',
+  unknown: 'stroke-unknown',
+};
+
+/** Names and tapes over the picture, in screen pixels. React makes them; the view moves them. */
+export function Overlay(props: Props) {
+  const { controller, bodies, tapes, style, litCellId, onSelectPiece } = props;
+  const layer = useRef<HTMLDivElement>(null);
+  const someLit = tapes.some((tape) => tape.cellId !== undefined && tape.cellId === litCellId);
+
+  const layOut = useCallback(() => {
+    const frame = controller.frame();
+    const root = layer.current;
+    if (!frame || !root) return;
+    const viewport = controller.viewport();
+    const find = <E extends Element>(kind: string, id: string) =>
+      root.querySelector<E>(`[data-${kind}="${CSS.escape(id)}"]`);
+    const sized = (kind: string, id: string) => {
+      const element = find<HTMLElement>(kind, id);
+      return { width: element?.offsetWidth ?? 0, height: element?.offsetHeight ?? 0 };
+    };
+    const headsMm = bodies.map((body) => body.crownMm);
+    const names = placeNames(
+      frame,
+      viewport,
+      bodies.map((body) => ({
+        id: body.placeId,
+        headMm: body.crownMm,
+        ...sized('name', body.placeId),
+      })),
+    );
+    const visible = new Set(names.map((name) => name.id));
+    for (const body of bodies) {
+      const hidden = !visible.has(body.placeId);
+      find<HTMLElement>('name', body.placeId)?.style.setProperty('visibility', hidden ? 'hidden' : 'visible');
+      if (hidden) find<SVGPathElement>('leader', body.placeId)?.setAttribute('d', '');
+    }
+    for (const name of names) {
+      const element = find<HTMLElement>('name', name.id);
+      element?.style.setProperty('transform', `translate(${name.x}px, ${name.y}px) translate(-50%, -50%)`);
+      find<SVGPathElement>('leader', name.id)?.setAttribute(
+        'd',
+        `M${name.x.toFixed(1)} ${(name.y + 11).toFixed(1)}L${name.head.x.toFixed(1)} ${(name.head.y - 2).toFixed(1)}`,
+      );
+    }
+    const placed = placeFlags(
+      frame,
+      viewport,
+      tapes.map((tape) => ({
+        id: tape.id,
+        fromMm: tape.fromMm,
+        toMm: tape.toMm,
+        ...sized('flag', tape.id),
+      })),
+      headsMm,
+      names,
+    );
+    for (const flag of placed) {
+      const tape = tapes.find((candidate) => candidate.id === flag.id);
+      find<HTMLElement>('flag', flag.id)?.style.setProperty(
+        'transform',
+        `translate(${flag.x}px, ${flag.y}px) translate(-50%, -50%)`,
+      );
+      const tickMm = style.system === 'millimetres' ? 20 : 25.4;
+      const path = tapePath(flag, Math.abs(tape?.valueMm ?? 0), tickMm);
+      find<SVGPathElement>('tape', flag.id)?.setAttribute('d', path);
+      const leader = flag.leader
+        ? `M${flag.leader.x.toFixed(1)} ${flag.leader.y.toFixed(1)}L${flag.x.toFixed(1)} ${flag.y.toFixed(1)}`
+        : '';
+      find<SVGPathElement>('tape-leader', flag.id)?.setAttribute('d', leader);
+    }
+  }, [controller, bodies, tapes, style]);
+
+  useLayoutEffect(layOut);
+  useEffect(() => controller.subscribe(layOut), [controller, layOut]);
+  useEffect(() => {
+    // The first layout may have measured words in the fallback font.
+    void document.fonts?.ready.then(layOut);
+  }, [layOut]);
+
+  return (
+    <div ref={layer} className="pointer-events-none absolute inset-0 overflow-hidden">
+      <svg className="tape absolute inset-0 size-full" aria-hidden="true" fill="none">
+        {bodies.map((body) => (
+          <path key={body.placeId} data-leader={body.placeId} className="stroke-ink-2" strokeWidth="0.9" />
+        ))}
+        {tapes.map((tape) => {
+          const lit = tape.cellId !== undefined && tape.cellId === litCellId;
+          return (
+            <g
+              key={tape.id}
+              className={LINE_TONES[tapeTone(tape)]}
+              opacity={someLit && !lit ? 0.5 : 1}
+              strokeWidth={lit ? 3 : 1.5}
+            >
+              <path data-tape={tape.id} />
+              <path data-tape-leader={tape.id} strokeWidth="1" />
+            </g>
+          );
+        })}
+      </svg>
+      {bodies.map((body) => (
+        <button
+          key={body.placeId}
+          type="button"
+          tabIndex={-1}
+          data-name={body.placeId}
+          onClick={() => onSelectPiece(body.pieceId)}
+          className="pointer-events-auto absolute top-0 left-0 px-0.5 text-[0.84rem] leading-5 whitespace-nowrap [text-shadow:0_0_3px_var(--color-paper),0_0_6px_var(--color-paper)]"
+        >
+          <strong className="font-semibold">{shortName(body.name)}</strong>
+          <span className="text-ink-2 max-phone:hidden">
+            {' '}
+            <Measure text={formatLength(body.statureMm, { ...style, feet: true })} />
+            {body.estimated && ', est.'}
+          </span>
+        </button>
+      ))}
+      {tapes.map((tape) => (
+        <div
+          key={tape.id}
+          data-flag={tape.id}
+          className={classNames(
+            'pointer-events-auto absolute top-0 left-0',
+            someLit && tape.cellId !== litCellId && 'opacity-50',
+          )}
+        >
+          <TapeFlag {...props} tape={tape} onLayout={layOut} />
+        </div>
+      ))}
+    </div>
+  );
+}

@@ -1,0 +1,176 @@
+import type { LengthStyle, TapeLine } from '@settlewright/geometry';
+import { useId, useLayoutEffect, useRef, useState } from 'react';
+import { classNames } from '@/components/class-names.ts';
+import { Measure } from '@/components/measure.tsx';
+import { NumberSlip } from '../components/number-slip.tsx';
+import { numbersOf } from '../components/piece-numbers.ts';
+import { useChangeNumber } from '../hooks/use-change-number.ts';
+import { useNumberEdit } from '../hooks/use-number-edit.ts';
+import type { NumberParameter } from '../numbers.ts';
+import { usePiece, useSurroundings } from '../room-context.tsx';
+import { sayTape, showTape, tapeTone } from './tape-words.ts';
+
+interface Props {
+  tape: TapeLine;
+  style: LengthStyle;
+  litCellId: string | null;
+  selectedPieceId: string | undefined;
+  onOpenCell: (cellId: string) => void;
+  onLayout: () => void;
+}
+
+const REST = {
+  chalk: 'border-chalk text-chalk hover:bg-chalk-wash',
+  ink: 'border-ink text-ink',
+  fits: 'border-fits text-fits hover:bg-fits-wash',
+  tight: 'border-tight text-tight hover:bg-tight-wash',
+  wont: 'border-wont text-wont hover:bg-wont-wash',
+  unknown: 'border-unknown text-unknown hover:bg-unknown-wash',
+};
+const LIT = {
+  chalk: 'border-chalk bg-chalk text-on-chalk',
+  ink: 'border-ink bg-ink text-paper',
+  fits: 'border-fits bg-fits text-paper',
+  tight: 'border-tight bg-tight text-paper',
+  wont: 'border-wont bg-wont text-paper',
+  unknown: 'border-unknown bg-unknown text-paper',
+};
+const FLAG = 'rounded-sm border-[1.25px] px-2 text-[0.84rem] leading-[1.35rem] whitespace-nowrap';
+
+/** The flag of a tape: a number to edit, or the gap of a check to open. */
+export function TapeFlag(props: Props) {
+  const { tape } = props;
+  const piece = usePiece(tape.pieceId);
+  const { canEdit } = useSurroundings();
+  const parameter = piece && tape.parameterKey ? numbersOf(piece).get(tape.parameterKey) : undefined;
+  if (tape.kind === 'dimension' && canEdit && piece && parameter) {
+    return <EditableFlag {...props} pieceId={piece.id} parameter={parameter} />;
+  }
+  return <PlainFlag {...props} />;
+}
+
+function PlainFlag({ tape, style, litCellId, onOpenCell }: Props) {
+  const lit = tape.cellId !== undefined && tape.cellId === litCellId;
+  const tone = tapeTone(tape);
+  const look = classNames(FLAG, lit ? LIT[tone] : classNames('bg-sheet', REST[tone]));
+  const words = (
+    <>
+      {tape.name}{' '}
+      <strong className="font-semibold">
+        <Measure text={showTape(tape, style)} />
+      </strong>
+    </>
+  );
+  const { cellId } = tape;
+  if (cellId === undefined) {
+    return (
+      <span role="img" aria-label={sayTape(tape, style)} className={classNames('block', look)}>
+        {words}
+      </span>
+    );
+  }
+  return (
+    <button
+      type="button"
+      aria-label={`${sayTape(tape, style)}, open the check`}
+      onClick={() => onOpenCell(cellId)}
+      className={classNames('quick block', look)}
+    >
+      {words}
+    </button>
+  );
+}
+
+function EditableFlag({
+  tape,
+  style,
+  pieceId,
+  parameter,
+  onLayout,
+}: Props & { pieceId: string; parameter: NumberParameter }) {
+  const change = useChangeNumber(pieceId, parameter);
+  const field = useRef<HTMLInputElement>(null);
+  const button = useRef<HTMLButtonElement>(null);
+  const [back, setBack] = useState(false);
+  const edit = useNumberEdit(parameter, style, change, { left: () => setBack(true) });
+  const slipId = useId();
+
+  useLayoutEffect(() => {
+    if (edit.editing) {
+      field.current?.focus();
+      field.current?.select();
+    } else if (back) button.current?.focus({ preventScroll: true });
+    onLayout();
+  }, [edit.editing, back, onLayout]);
+
+  if (!edit.editing) {
+    return (
+      <button
+        ref={button}
+        type="button"
+        aria-label={`${sayTape(tape, style)}, edit`}
+        onClick={() => edit.begin()}
+        onBlur={() => setBack(false)}
+        onKeyDown={(event) => {
+          if (/^[0-9.]$/.test(event.key) && !event.ctrlKey && !event.metaKey && !event.altKey) {
+            event.preventDefault();
+            event.stopPropagation();
+            edit.begin(event.key);
+          } else if (event.key === 'F2') edit.begin();
+          else if (event.key.startsWith('Arrow')) {
+            event.stopPropagation();
+            edit.keys(event);
+          }
+        }}
+        className={classNames('quick block bg-sheet', FLAG, REST.chalk)}
+      >
+        {tape.name}{' '}
+        <strong className="font-semibold">
+          <Measure text={showTape(tape, style)} />
+        </strong>
+      </button>
+    );
+  }
+  const wrong = edit.reading.kind !== 'value';
+  return (
+    <div
+      className={classNames(
+        'relative flex items-center',
+        FLAG,
+        wrong ? 'border-wont bg-wont-wash' : LIT.chalk,
+      )}
+    >
+      <span aria-hidden="true">{tape.name}&nbsp;</span>
+      <input
+        ref={field}
+        value={edit.text}
+        onChange={(event) => edit.type(event.target.value)}
+        onKeyDown={(event) => {
+          event.stopPropagation();
+          edit.keys(event);
+          if (event.key === 'Tab' && !edit.finish()) event.preventDefault();
+        }}
+        onBlur={(event) => {
+          if (event.relatedTarget?.closest(`#${CSS.escape(slipId)}`)) return;
+          if (!edit.finish()) edit.cancel();
+        }}
+        aria-label={parameter.label}
+        aria-describedby={slipId}
+        aria-invalid={wrong || undefined}
+        autoComplete="off"
+        style={{ width: `${Math.max(4, edit.text.length + 1)}ch` }}
+        className="bg-transparent text-center font-semibold outline-2 outline-transparent focus-visible:shadow-none"
+      />
+      <div className="absolute top-full left-1/2 z-20 mt-2 w-64 -translate-x-1/2 rounded-md bg-sheet p-3 whitespace-normal text-ink shadow-slip">
+        <NumberSlip
+          id={slipId}
+          pieceId={pieceId}
+          parameter={parameter}
+          reading={edit.reading}
+          editing
+          onTake={edit.take}
+        />
+      </div>
+    </div>
+  );
+}

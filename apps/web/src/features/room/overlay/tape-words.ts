@@ -1,0 +1,44 @@
+import type { FitSheet } from '@settlewright/anthropometry';
+import { formatLength, spokenLength, type LengthStyle, type TapeLine } from '@settlewright/geometry';
+import { verdictWord } from '@/components/verdict.tsx';
+import { worstCell } from '../verdict-words.ts';
+
+/** Tapes that are drawn at rest: the selected piece's own, the worst gap, and the lit one. */
+export function tapesAtRest(
+  tapes: readonly TapeLine[],
+  sheet: FitSheet,
+  selectedPieceId: string | undefined,
+  litCellId: string | null,
+  most = 12,
+): TapeLine[] {
+  const worst = worstCell(sheet);
+  const gaps = tapes.filter(
+    (tape) => tape.kind === 'gap' && (tape.cellId === litCellId || tape.cellId === worst?.id),
+  );
+  const own = tapes.filter((tape) => tape.kind !== 'gap' && tape.pieceId === selectedPieceId);
+  return [...own.slice(0, Math.max(1, most - gaps.length)), ...gaps];
+}
+
+export const showTape = (tape: TapeLine, style: LengthStyle): string =>
+  formatLength(tape.valueMm, { ...style, feet: /length/i.test(tape.parameterKey ?? '') });
+
+/** Full name of a tape for a list or a screen reader. */
+export function sayTape(tape: TapeLine, style: LengthStyle): string {
+  const verdict = tape.verdict ? `, ${verdictWord(tape.verdict)}` : '';
+  return `${tape.name}, ${spokenLength(tape.valueMm, style)}, ${tape.describes}${verdict}`;
+}
+
+export function tapeTone(tape: TapeLine): 'chalk' | 'ink' | 'fits' | 'tight' | 'wont' | 'unknown' {
+  if (tape.kind === 'fixed') return 'ink';
+  if (tape.kind === 'dimension') return 'chalk';
+  switch (tape.verdict) {
+    case 'fits':
+      return 'fits';
+    case 'tight':
+      return 'tight';
+    case 'wontFit':
+      return 'wont';
+    default:
+      return 'unknown';
+  }
+}

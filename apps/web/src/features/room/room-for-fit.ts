@@ -1,0 +1,88 @@
+import type { FitCell, FitSheet, RuleBook } from '@settlewright/anthropometry';
+import { suggestFixes, formatLength, type Fix, type LengthStyle } from '@settlewright/geometry';
+import { useMemo } from 'react';
+import { useRoomAddress } from './hooks/use-address.ts';
+import { usePieceActions } from './hooks/use-piece-actions.ts';
+import { usePicture, useSurroundings } from './room-context.tsx';
+import { sitterColour } from './sitters.ts';
+import { useRoom, useRoomStore } from './store.ts';
+
+/** What the fit sheet needs of the room; the route hands it on, as features do not know each other. */
+export interface RoomForFit {
+  sheet: FitSheet;
+  ruleBook: RuleBook;
+  style: LengthStyle;
+  detail: 'full' | 'verdicts';
+  colourOf: (sitterId: string) => number;
+  /** Words behind a name: "5′ 2″", "5′ 10″, est.". */
+  aside: (sitterId: string) => string;
+  litCellId: string | null;
+  light: (cellId: string | null) => void;
+  fixesFor?: (cell: FitCell) => Fix[];
+  take?: (fix: Fix) => void;
+  clientView: boolean;
+  drawerOpen: boolean;
+  openDrawer: (open: boolean) => void;
+}
+
+export function useRoomForFit(): RoomForFit {
+  const { engine, style, detail, canEdit, cast, maker } = useSurroundings();
+  const picture = usePicture();
+  const store = useRoomStore();
+  const litCellId = useRoom((state) => state.litCellId);
+  const { fitOpen, clientView, openFit, select } = useRoomAddress();
+  const actions = usePieceActions(select);
+
+  return useMemo(() => {
+    const placeOf = new Map(picture.sheet.rows.map((row) => [row.sitterId, row.placeId]));
+    const seatOf = new Map(
+      picture.document.seating.map((seat) => [`${seat.pieceId}:${seat.place}`, seat.sitter]),
+    );
+    const bodyOf = new Map(picture.bodies.map((body) => [body.placeId, body]));
+    return {
+      sheet: picture.sheet,
+      ruleBook: engine.ruleBook,
+      style,
+      detail,
+      colourOf: (sitterId) => {
+        const sitter = seatOf.get(placeOf.get(sitterId) ?? '');
+        return sitter ? sitterColour(sitter, cast) : 6;
+      },
+      aside: (sitterId) => {
+        const body = bodyOf.get(placeOf.get(sitterId) ?? '');
+        if (!body || detail === 'verdicts') return '';
+        return `${formatLength(body.statureMm, { ...style, feet: true })}${body.estimated ? ', est.' : ''}`;
+      },
+      litCellId,
+      light: (cellId) => store.getState().light(cellId),
+      ...(canEdit && {
+        fixesFor: (cell: FitCell) => suggestFixes({ document: picture.document, cell, check: maker.check }),
+        take: (fix: Fix) => {
+          const show = (mm: number) => formatLength(mm, style);
+          const label = fix.label.toLowerCase();
+          actions.replace(
+            fix.document,
+            `${fix.mark} ${label} ${show(fix.fromValue)} to ${show(fix.toValue)}`,
+          );
+        },
+      }),
+      clientView,
+      drawerOpen: fitOpen,
+      openDrawer: openFit,
+    };
+  }, [
+    picture,
+    engine,
+    style,
+    detail,
+    cast,
+    litCellId,
+    store,
+    canEdit,
+    maker,
+    actions,
+    clientView,
+    fitOpen,
+    openFit,
+  ]);
+}
