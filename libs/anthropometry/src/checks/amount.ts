@@ -1,10 +1,10 @@
 import type { MeasureKey } from '../measures/measures.ts';
-import type { Body, JointComponent } from '../people/body.ts';
+import type { Body, Combination, JointComponent } from '../people/body.ts';
 
 /** What one body adds to an amount. */
 interface Term {
   body: Body;
-  weights: Partial<Record<MeasureKey, number>>;
+  parts: Combination;
 }
 
 /** A number that may hang on the measures of one or more bodies. */
@@ -13,13 +13,16 @@ export interface Amount {
   terms: readonly Term[];
 }
 
+const NO_TERMS: readonly Term[] = [];
+const NO_PARTS: Combination = [];
+
 /** A plain number. */
-export const fixed = (constant: number): Amount => ({ constant, terms: [] });
+export const fixed = (constant: number): Amount => ({ constant, terms: NO_TERMS });
 
 /** A measure of a body, times a factor. */
 export const ofBody = (body: Body, key: MeasureKey, factor = 1): Amount => ({
   constant: 0,
-  terms: [{ body, weights: { [key]: factor } }],
+  terms: [{ body, parts: [[key, factor]] }],
 });
 
 /** `a` + factor · `b`. */
@@ -27,16 +30,17 @@ export function plus(a: Amount, b: Amount, factor = 1): Amount {
   const constant = a.constant + factor * b.constant;
   if (b.terms.length === 0) return { constant, terms: a.terms };
   if (a.terms.length === 0 && factor === 1) return { constant, terms: b.terms };
-  const terms = [...a.terms];
-  for (const { body, weights } of b.terms) {
+  const terms = a.terms.slice();
+  for (const { body, parts } of b.terms) {
     const index = terms.findIndex((term) => term.body === body);
-    const sum = { ...terms[index]?.weights };
-    for (const key in weights) {
-      const measure = key as MeasureKey;
-      sum[measure] = (sum[measure] ?? 0) + factor * (weights[measure] as number);
+    const sum = (index < 0 ? NO_PARTS : (terms[index] as Term).parts).slice();
+    for (const [key, weight] of parts) {
+      const at = sum.findIndex((part) => part[0] === key);
+      if (at < 0) sum.push([key, factor * weight]);
+      else sum[at] = [key, (sum[at] as Combination[number])[1] + factor * weight];
     }
-    if (index < 0) terms.push({ body, weights: sum });
-    else terms[index] = { body, weights: sum };
+    if (index < 0) terms.push({ body, parts: sum });
+    else terms[index] = { body, parts: sum };
   }
   return { constant, terms };
 }
@@ -53,22 +57,28 @@ export const moved = (a: Amount, by: number): Amount => ({ constant: a.constant 
 /** Best value of an amount. */
 export function best(amount: Amount): number {
   let sum = amount.constant;
-  for (const { body, weights } of amount.terms) {
-    for (const key in weights) sum += (weights[key as MeasureKey] as number) * body.mean(key as MeasureKey);
+  for (const { body, parts } of amount.terms) {
+    for (const [key, factor] of parts) sum += factor * body.mean(key);
   }
   return sum;
 }
 
-/** Measures that enter and were not taken from the person, by body. */
-export function predictedMeasures(amount: Amount): { body: Body; key: MeasureKey }[] {
-  return amount.terms.flatMap(({ body, weights }) =>
-    (Object.keys(weights) as MeasureKey[])
-      .filter((key) => weights[key] !== 0 && !body.isMeasured(key))
-      .map((key) => ({ body, key })),
-  );
+/** A measure that was not taken from the person. */
+export interface PredictedMeasure {
+  body: Body;
+  key: MeasureKey;
 }
 
-const NOTHING: Partial<Record<MeasureKey, number>> = {};
+/** Adds to a list the measures that enter an amount and were not taken from the person. */
+export function collectPredicted(amount: Amount, found: PredictedMeasure[]): void {
+  for (const { body, parts } of amount.terms) {
+    for (const [key, factor] of parts) {
+      if (factor === 0 || body.isMeasured(key)) continue;
+      if (!found.some((one) => one.body === body && one.key === key)) found.push({ body, key });
+    }
+  }
+}
+
 /** More components than this are taken together into one normal of the same mean and spread. */
 const MOST_COMPONENTS = 8;
 
@@ -79,13 +89,9 @@ const MOST_COMPONENTS = 8;
  * @returns a mixture; weights add to 1
  */
 export function jointOf(amounts: readonly Amount[]): JointComponent[] {
-  const bodies = new Set<Body>();
-  for (const { terms } of amounts) for (const { body } of terms) bodies.add(body);
-  if (bodies.size === 1) {
-    const [only] = [...bodies] as [Body];
-    return only.joint(
-      amounts.map(({ constant, terms }) => ({ constant, weights: terms[0]?.weights ?? NOTHING })),
-    );
+  const bodies: Body[] = [];
+  for (const { terms } of amounts) {
+    for (const { body } of terms) if (!bodies.includes(body)) bodies.push(body);
   }
   let joined: JointComponent[] = [
     {
@@ -96,22 +102,19 @@ export function jointOf(amounts: readonly Amount[]): JointComponent[] {
   ];
   for (const body of bodies) {
     const parts = body.joint(
-      amounts.map(({ terms }) => ({
-        constant: 0,
-        weights: terms.find((term) => term.body === body)?.weights ?? NOTHING,
-      })),
+      amounts.map(({ terms }) => terms.find((term) => term.body === body)?.parts ?? NO_PARTS),
     );
-    joined = joined.flatMap((a) =>
-      parts.map((b) => ({
-        weight: a.weight * b.weight,
-        means: a.means.map((mean, i) => mean + (b.means[i] as number)),
-        covariances: a.covariances.map((row, i) => row.map((c, j) => c + (b.covariances[i]?.[j] as number))),
-      })),
-    );
+    joined = joined.flatMap((a) => parts.map((b) => added(a, b)));
     if (joined.length > MOST_COMPONENTS) joined = [takenTogether(joined)];
   }
   return joined;
 }
+
+const added = (a: JointComponent, b: JointComponent): JointComponent => ({
+  weight: a.weight * b.weight,
+  means: a.means.map((mean, i) => mean + (b.means[i] as number)),
+  covariances: a.covariances.map((row, i) => row.map((c, j) => c + (b.covariances[i]?.[j] as number))),
+});
 
 function takenTogether(components: readonly JointComponent[]): JointComponent {
   const size = (components[0] as JointComponent).means.length;

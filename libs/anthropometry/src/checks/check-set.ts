@@ -153,11 +153,12 @@ function cellPieces(
 /** The public: each rule at the end of the population it protects, at the place where that is worst. */
 function publicRowOf(input: CheckInput): PublicRow {
   const { ruleBook } = input;
+  const places = unlike(input.situation.places);
   const cells = PERSON_CHECKS.map((check) => {
     const personal = ruleBook.rule(check.id);
     const rule = personal.publicRule ? ruleBook.rule(personal.publicRule) : personal;
     const judgement = judgementOf(input, rule);
-    const { said, place } = worstPlace(input, check, rule, judgement);
+    const { said, place } = worstPlace(input, places, check, rule, judgement);
     const { outcome, pieces, side } = answered(said, judgement);
     return {
       id: `${rule.id}|public`,
@@ -173,16 +174,30 @@ function publicRowOf(input: CheckInput): PublicRow {
   return { cells };
 }
 
+/** Names tell places apart, but not what they offer. */
+const NAMES = new Set(['placeId', 'pieceId', 'mark', 'place']);
+
+/** One place of each kind: places that offer the same numbers serve the public alike. */
+function unlike(places: readonly PlaceSituation[]): PlaceSituation[] {
+  const found = new Map<string, PlaceSituation>();
+  for (const place of places) {
+    const offer = JSON.stringify(place, (key, value: unknown) => (NAMES.has(key) ? undefined : value));
+    if (!found.has(offer)) found.set(offer, place);
+  }
+  return [...found.values()];
+}
+
 /** What a rule says of the public at the place where that is worst; a verdict stands before any silence. */
 function worstPlace(
   input: CheckInput,
+  places: readonly PlaceSituation[],
   check: PersonCheck,
   rule: Rule,
   judgement: Judgement,
 ): { said: Said; place?: PlaceSituation } {
   let silent: { said: Said; place?: PlaceSituation } = { said: { reason: 'no place' } };
   let worst: { said: Answer[]; place: PlaceSituation; finding: Found['finding'] } | undefined;
-  for (const place of input.situation.places) {
+  for (const place of places) {
     const said = askPublic(check, publicAsked(input, rule, place));
     if (!Array.isArray(said)) {
       if (!silent.place) silent = { said, place };

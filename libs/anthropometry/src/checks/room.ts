@@ -83,7 +83,7 @@ function standardRoom(mean: number, sd: number, least: number): number {
 }
 
 const STEPS = 60;
-const CLOSE_ENOUGH = 1e-5;
+const CLOSE_ENOUGH = 1e-4;
 
 /**
  * The room that a share p of such people have less than.
@@ -93,7 +93,7 @@ const CLOSE_ENOUGH = 1e-5;
  * @param tolerance - stop when known this well, rule's unit
  * @returns rule's unit
  */
-export function roomQuantile(rooms: readonly Room[], p: number, tolerance = 0.02): number {
+export function roomQuantile(rooms: readonly Room[], p: number, tolerance = 0.05): number {
   // Of two sides the lesser room counts: its quantile lies under both sides' own, and over their half-share ones.
   const whole = normalQuantile(p);
   const half = normalQuantile(p / 2);

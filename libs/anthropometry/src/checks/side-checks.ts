@@ -1,4 +1,4 @@
-import { fixed, minus, moved, ofBody, plus, times } from './amount.ts';
+import { best, fixed, minus, moved, ofBody, plus, times } from './amount.ts';
 import {
   clothingOf,
   measureEntry,
@@ -70,12 +70,7 @@ export const elbowToSill: PersonCheck = {
 function shoulderOver(asked: Asked, sill: SillSituation): Said {
   const { height } = pressedSeat(asked, 'hip');
   const over = moved(plus(height, ofBody(asked.body, 'acromial_height_sitting')), -sill.topMm);
-  const value = over.terms.reduce(
-    (sum, { body, weights }) =>
-      Object.entries(weights).reduce((part, [key, w]) => part + w * body.mean(key as 'weight_kg'), sum),
-    over.constant,
-  );
-  return { information: { value, words: `shoulder over ${sill.mark}, the sill behind` } };
+  return { information: { value: best(over), words: `shoulder over ${sill.mark}, the sill behind` } };
 }
 
 /**

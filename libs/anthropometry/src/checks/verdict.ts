@@ -1,5 +1,5 @@
 import type { MeasureKey } from '../measures/measures.ts';
-import { best, minus, predictedMeasures, type Amount } from './amount.ts';
+import { best, collectPredicted, minus, type Amount, type PredictedMeasure } from './amount.ts';
 import type { LedgerLine, LimitLines, Verdict, VerdictOutcome } from './fit-sheet.ts';
 import { probabilityOfRoom, roomMoved, roomQuantile, roomWithin, type Band } from './room.ts';
 
@@ -33,7 +33,7 @@ interface Finding extends Pick<
   /** The side of the nearest fail line. */
   side: 'lower' | 'upper';
   /** What was not taken from the sitter. */
-  predicted: Predicted;
+  predicted: PredictedMeasure[];
 }
 
 /**
@@ -143,33 +143,29 @@ function linesOf({ lower, upper }: Band): LimitLines {
   return lines;
 }
 
-type Predicted = ReturnType<typeof predictedMeasures>;
-
-function predictedIn({ value, pass, fail }: Question): Predicted {
-  const found: Predicted = [];
+function predictedIn({ value, pass, fail }: Question): PredictedMeasure[] {
+  const found: PredictedMeasure[] = [];
   for (const amount of [value, pass.lower, pass.upper, fail.lower, fail.upper]) {
-    if (!amount || amount.terms.length === 0) continue;
-    for (const entry of predictedMeasures(amount)) {
-      if (!found.some(({ body, key }) => body === entry.body && key === entry.key)) found.push(entry);
-    }
+    if (amount && amount.terms.length > 0) collectPredicted(amount, found);
   }
   return found;
 }
 
 /** Measures ordered by how much of the margin's variance goes once they are known. */
-function mostUseful(question: Question, side: 'lower' | 'upper', predicted: Predicted): MeasureKey[] {
+function mostUseful(
+  question: Question,
+  side: 'lower' | 'upper',
+  predicted: readonly PredictedMeasure[],
+): MeasureKey[] {
   const line = question.fail[side] ?? question.pass[side];
   if (!line) return [];
   const margin = minus(question.value, line);
   const shares = new Map<MeasureKey, number>();
   for (const { body, key } of predicted) {
-    const weights = margin.terms.find((term) => term.body === body)?.weights ?? {};
+    const parts = margin.terms.find((term) => term.body === body)?.parts ?? [];
     let removed = 0;
     let total = 0;
-    for (const { weight, covariances } of body.joint([
-      { constant: 0, weights },
-      { constant: 0, weights: { [key]: 1 } },
-    ])) {
+    for (const { weight, covariances } of body.joint([parts, [[key, 1]]])) {
       const [[variance = 0, together = 0] = [], [, own = 0] = []] = covariances;
       total += weight * variance;
       removed += own > 0 ? (weight * together * together) / own : 0;

@@ -123,6 +123,15 @@ describe('several measures together', () => {
   });
 });
 
+describe('measures that say the same thing twice', () => {
+  it('are read once', () => {
+    const measured = { acromial_height: 1450, acromial_height_sitting: 605, sitting_height: 915 };
+    const body = model.predict({ ...tall('men', 1756), measured });
+    expect(body.mean('acromial_height_sitting')).toBe(605);
+    expect(body.mean('popliteal_height')).toBeGreaterThan(400);
+  });
+});
+
 describe('unknown sex', () => {
   it('a crowd of both has the mean and spread of the mixture', () => {
     // 50/50 crowd of the survey: shoulder breadth 480.4, spread 42.9.

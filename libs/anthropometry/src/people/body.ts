@@ -2,6 +2,9 @@ import { MEASURE_KEYS, type MeasureKey } from '../measures/measures.ts';
 import type { GroupModel, Posterior } from './group-model.ts';
 import type { Estimate, KnownPerson, Linear } from './person.ts';
 
+/** Measures with their factors; the list form of a linear combination without a constant. */
+export type Combination = readonly (readonly [key: MeasureKey, factor: number])[];
+
 /** Means and covariances of several linear combinations under one group. */
 export interface JointComponent {
   weight: number;
@@ -22,7 +25,7 @@ export interface Body {
    */
   estimate(x: MeasureKey | Linear): Estimate;
   /** Several combinations together, with their correlation. */
-  joint(combinations: readonly Linear[]): JointComponent[];
+  joint(combinations: readonly Combination[]): JointComponent[];
   /** Best value of one measure, millimetres (kilograms for weight). */
   mean(key: MeasureKey): number;
   /** Best value of every measure. */
@@ -57,17 +60,16 @@ export function bodyFrom(person: KnownPerson, parts: readonly WeightedPosterior[
     (key === 'stature' && person.stature?.source === 'measured') ||
     (key === 'weight_kg' && person.weightKg !== undefined);
 
-  const sparse = (part: WeightedPosterior, x: Linear): SparseRow => {
+  const sparse = (part: WeightedPosterior, combination: Combination): SparseRow => {
     const row: [number, number][] = [];
-    for (const key in x.weights) {
-      const weight = x.weights[key as MeasureKey] as number;
-      if (weight === 0) continue;
-      for (const [index, factor] of part.group.rowOf(key as MeasureKey)) row.push([index, factor * weight]);
+    for (const [key, factor] of combination) {
+      if (factor === 0) continue;
+      for (const [index, share] of part.group.rowOf(key)) row.push([index, share * factor]);
     }
     return row;
   };
-  const meanOf = (part: WeightedPosterior, row: SparseRow, constant: number): number => {
-    let sum = constant;
+  const meanOf = (part: WeightedPosterior, row: SparseRow): number => {
+    let sum = 0;
     for (const [index, weight] of row) sum += weight * (part.posterior.mean[index] as number);
     return sum;
   };
@@ -80,11 +82,11 @@ export function bodyFrom(person: KnownPerson, parts: readonly WeightedPosterior[
     return sum;
   };
 
-  const joint = (combinations: readonly Linear[]): JointComponent[] =>
+  const joint = (combinations: readonly Combination[]): JointComponent[] =>
     parts.map((part) => {
       const rows = combinations.map((x) => sparse(part, x));
       const size = rows.length;
-      const means = rows.map((row, i) => meanOf(part, row, (combinations[i] as Linear).constant));
+      const means = rows.map((row) => meanOf(part, row));
       const covariances = rows.map(() => new Array<number>(size).fill(0));
       for (let i = 0; i < size; i += 1) {
         for (let j = i; j < size; j += 1) {
@@ -103,13 +105,12 @@ export function bodyFrom(person: KnownPerson, parts: readonly WeightedPosterior[
       return { weight: part.weight, means, covariances };
     });
 
-  const single = (key: MeasureKey): Linear => ({ constant: 0, weights: { [key]: 1 } });
   const bests = new Map<MeasureKey, number>();
   const mean = (key: MeasureKey): number => {
     const known = bests.get(key);
     if (known !== undefined) return known;
     let sum = 0;
-    for (const part of parts) sum += part.weight * meanOf(part, part.group.rowOf(key), 0);
+    for (const part of parts) sum += part.weight * meanOf(part, part.group.rowOf(key));
     bests.set(key, sum);
     return sum;
   };
@@ -120,15 +121,16 @@ export function bodyFrom(person: KnownPerson, parts: readonly WeightedPosterior[
       return mean('weight_kg');
     },
     estimate(x) {
-      const combination = typeof x === 'string' ? single(x) : x;
-      const keys = Object.keys(combination.weights) as MeasureKey[];
+      const combination: Combination =
+        typeof x === 'string' ? [[x, 1]] : (Object.entries(x.weights) as [MeasureKey, number][]);
+      const constant = typeof x === 'string' ? 0 : x.constant;
       return {
         components: joint([combination]).map(({ weight, means, covariances }) => ({
           weight,
-          mean: means[0] as number,
+          mean: constant + (means[0] as number),
           sd: Math.sqrt(covariances[0]?.[0] as number),
         })),
-        measured: keys.every((key) => combination.weights[key] === 0 || isMeasured(key)),
+        measured: combination.every(([key, factor]) => factor === 0 || isMeasured(key)),
       };
     },
     joint,

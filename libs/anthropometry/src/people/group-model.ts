@@ -143,7 +143,8 @@ export function createGroupModel(survey: Survey, group: SurveyGroup): GroupModel
   return {
     size,
     rowOf,
-    condition(observations) {
+    condition(known) {
+      const observations = withoutRepeats(known);
       if (observations.length === 0) return { mean, covariance, logLikelihood: 0 };
       const { gain, covariance: posterior, precision, logDeterminant } = factorise(observations);
       const count = observations.length;
@@ -167,4 +168,10 @@ export function createGroupModel(survey: Survey, group: SurveyGroup): GroupModel
       return { mean: predicted, covariance: posterior, logLikelihood };
     },
   };
+}
+
+/** Leaves out a derived measure whose parts are all measured: it would say the same thing twice. */
+function withoutRepeats(observations: readonly Observation[]): readonly Observation[] {
+  const exact = new Set(observations.filter(({ noiseSd }) => noiseSd === 0).map(({ key }) => key));
+  return observations.filter(({ key }) => !DERIVED[key]?.every(([part]) => exact.has(part)));
 }

@@ -53,9 +53,7 @@ describe.each(groups)('head counts, %s', (group) => {
 
 /** Share of a quasi-random sample of bodies within all limits; the sequence is always the same. */
 function sampledShare(group: 'men' | 'women', limits: readonly Limit[]): number {
-  const [joint] = crowd(group).joint(
-    limits.map(({ measure }) => ({ constant: 0, weights: { [measure]: 1 } })),
-  );
+  const [joint] = crowd(group).joint(limits.map(({ measure }) => [[measure, 1] as const]));
   if (!joint) throw new Error('no joint distribution');
   const factor = new CholeskyDecomposition(new Matrix(joint.covariances)).lowerTriangularMatrix;
   const bases = [2, 3, 5, 7, 11];
