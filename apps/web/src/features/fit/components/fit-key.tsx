@@ -1,0 +1,21 @@
+/** What the signs on the sheet mean; stands on every page that shows it. */
+export function FitKey() {
+  return (
+    <p className="text-sm text-ink-2">
+      <strong className="font-semibold text-ink">+</strong> room left to the fail line,{' '}
+      <strong className="font-semibold text-ink">−</strong> short of it.{' '}
+      <span className="font-medium text-ink">est.</span> predicted or told, with the range that holds 90 in
+      100. Cushions pressed by each sitter, shoes on, backs against the rest.
+    </p>
+  );
+}
+
+/** Stands under every sheet. */
+export function FitCaution() {
+  return (
+    <p className="text-sm text-ink-2">
+      Guidance, not certification. Local codes, the authority having jurisdiction and licensed practice
+      decide. Body data describe surveyed groups, not a person: try the seat.
+    </p>
+  );
+}

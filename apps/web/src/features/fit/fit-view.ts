@@ -1,0 +1,30 @@
+import type { FitCell, FitSheet, RuleBook } from '@settlewright/anthropometry';
+import type { Fix, LengthStyle } from '@settlewright/geometry';
+import { createContext, useContext } from 'react';
+
+/** What every part of the fit sheet reads; the page that shows the sheet provides it. */
+export interface FitView {
+  sheet: FitSheet;
+  ruleBook: RuleBook;
+  style: LengthStyle;
+  /** `verdicts` for members who may not see what a verdict rests on. */
+  detail: 'full' | 'verdicts';
+  colourOf: (sitterId: string) => number;
+  /** Words behind a name: "5′ 2″", "5′ 10″, est."; empty when not for this reader. */
+  aside: (sitterId: string) => string;
+  litCellId: string | null;
+  light: (cellId: string | null) => void;
+  openCellId: string | null;
+  open: (cellId: string | null) => void;
+  /** Absent when the document cannot be changed here. */
+  fixesFor?: (cell: FitCell) => Fix[];
+  take?: (fix: Fix) => void;
+}
+
+export const FitViewContext = createContext<FitView | null>(null);
+
+export function useFitView(): FitView {
+  const view = useContext(FitViewContext);
+  if (view === null) throw new Error('Part of the fit sheet stands outside a FitViewContext.');
+  return view;
+}
