@@ -1,6 +1,6 @@
 import { Injectable } from '@nestjs/common';
 import { InjectRepository } from '@nestjs/typeorm';
-import { type EntityManager, IsNull, type Repository } from 'typeorm';
+import { type EntityManager, In, IsNull, type Repository } from 'typeorm';
 import { AuditService } from '../audit/audit.service';
 import type { MemberInfo } from '../common/access.decorator';
 import type { Page, PageQuery } from '../common/page.dto';
@@ -46,9 +46,7 @@ export class CastService {
 
   async find(member: MemberInfo, productionId: string, castId: string): Promise<CastMember> {
     await this.productions.forReading(member, productionId);
-    const person = await this.people.findOneBy({ id: castId, productionId, removedAt: IsNull() });
-    if (!person) throw Problem.notFound('cast member');
-    return person;
+    return present(this.people.manager, productionId, castId);
   }
 
   async create(member: MemberInfo, productionId: string, dto: CreateCastMemberDto): Promise<CastMember> {
@@ -84,19 +82,24 @@ export class CastService {
     dto: PatchCastMemberDto,
   ): Promise<CastMember> {
     await this.productions.forChanging(member, productionId);
-    const person = await this.find(member, productionId, castId);
-    person.name = dto.name ?? person.name;
-    person.role = dto.role ?? person.role;
-    person.bodyData = dto.bodyData ?? person.bodyData;
-    if (dto.statureMm !== undefined) person.statureMm = dto.statureMm;
-    person.statureSource = dto.statureSource ?? person.statureSource;
-    if (dto.weightKg !== undefined) person.weightKg = dto.weightKg;
-    if (dto.measured) person.measured = measuredOf(dto.measured);
-    person.shoeMm = dto.shoeMm ?? person.shoeMm;
-    person.clothing = dto.clothing ?? person.clothing;
-    person.notes = dto.notes ?? person.notes;
-    person.colour = dto.colour ?? person.colour;
-    return this.people.save(person);
+    const measured = dto.measured ? measuredOf(dto.measured) : undefined;
+    return this.people.manager.transaction(async (manager) => {
+      // Without the lock a person who is being erased could come back with the numbers read here.
+      await this.productions.lockPeople(manager, productionId);
+      const person = await present(manager, productionId, castId);
+      person.name = dto.name ?? person.name;
+      person.role = dto.role ?? person.role;
+      person.bodyData = dto.bodyData ?? person.bodyData;
+      if (dto.statureMm !== undefined) person.statureMm = dto.statureMm;
+      person.statureSource = dto.statureSource ?? person.statureSource;
+      if (dto.weightKg !== undefined) person.weightKg = dto.weightKg;
+      person.measured = measured ?? person.measured;
+      person.shoeMm = dto.shoeMm ?? person.shoeMm;
+      person.clothing = dto.clothing ?? person.clothing;
+      person.notes = dto.notes ?? person.notes;
+      person.colour = dto.colour ?? person.colour;
+      return manager.save(person);
+    });
   }
 
   async all(member: MemberInfo, productionId: string): Promise<CastMember[]> {
@@ -138,23 +141,31 @@ export class CastService {
     });
   }
 
-  /** Everyone a document of the production may name, erased people included. For other modules. */
-  everyone(productionId: string, manager?: EntityManager): Promise<CastMember[]> {
-    return (manager ?? this.people.manager).findBy(CastMember, { productionId });
+  /** Those of these people who belong to the production, erased ones included. For other modules. */
+  async among(productionId: string, ids: string[], manager?: EntityManager): Promise<CastMember[]> {
+    if (ids.length === 0) return [];
+    return (manager ?? this.people.manager).findBy(CastMember, { productionId, id: In(ids) });
   }
 
-  /** Part of the caller's transaction. Answers the name that stands in the person's stead. */
-  async removePersonalData(manager: EntityManager, person: CastMember): Promise<string> {
+  /** Part of the caller's transaction. Answers the name that was, and the one that stands in its stead. */
+  async removePersonalData(
+    manager: EntityManager,
+    productionId: string,
+    castId: string,
+  ): Promise<{ name: string; newName: string }> {
+    await this.productions.lockPeople(manager, productionId);
+    const person = await present(manager, productionId, castId);
+    const { name } = person;
     const { max } = (await manager
       .createQueryBuilder(CastMember, 'person')
       .select('COALESCE(MAX(person.removedNumber), 0)', 'max')
       .where('person.productionId = :id', { id: person.productionId })
       .getRawOne<{ max: number }>()) ?? { max: 0 };
     const removedNumber = max + 1;
-    const name = `removed sitter ${removedNumber}`;
+    const newName = `removed sitter ${removedNumber}`;
     await manager.save(
       Object.assign(person, {
-        name,
+        name: newName,
         role: '',
         bodyData: 'mixed',
         statureMm: null,
@@ -168,7 +179,7 @@ export class CastService {
         removedNumber,
       } satisfies Partial<CastMember>),
     );
-    return name;
+    return { name, newName };
   }
 
   /** Part of the caller's transaction: copies everyone; answers the copy's id by the original's. */
@@ -177,7 +188,7 @@ export class CastService {
     fromProductionId: string,
     toProductionId: string,
   ): Promise<Map<string, string>> {
-    const people = await this.everyone(fromProductionId, manager);
+    const people = await manager.findBy(CastMember, { productionId: fromProductionId });
     const copies = people.map(({ id: _id, createdAt: _created, updatedAt: _updated, ...rest }) =>
       manager.create(CastMember, { ...rest, productionId: toProductionId }),
     );
@@ -193,6 +204,12 @@ export class CastService {
       known.map(({ name }) => name),
     );
   }
+}
+
+async function present(manager: EntityManager, productionId: string, castId: string): Promise<CastMember> {
+  const person = await manager.findOneBy(CastMember, { id: castId, productionId, removedAt: IsNull() });
+  if (!person) throw Problem.notFound('cast member');
+  return person;
 }
 
 async function wornColours(manager: EntityManager, productionId: string): Promise<number[]> {

@@ -33,6 +33,11 @@ export class ProductionsService {
     return production;
   }
 
+  /** Keeps other writers who ask for the same from the production's people until the transaction ends. */
+  async lockPeople(manager: EntityManager, productionId: string): Promise<void> {
+    await manager.query('SELECT 1 FROM productions WHERE id = $1 FOR NO KEY UPDATE', [productionId]);
+  }
+
   list(member: MemberInfo, query: ProductionQuery): Promise<Page<Production>> {
     const select = this.productions
       .createQueryBuilder('production')

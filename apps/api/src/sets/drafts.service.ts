@@ -2,8 +2,7 @@ import type { SetDocument } from '@settlewright/geometry';
 import { Injectable, Logger } from '@nestjs/common';
 import { InjectRepository } from '@nestjs/typeorm';
 import { type EntityManager, LessThanOrEqual, type Repository } from 'typeorm';
-import { CastService } from '../cast/cast.service';
-import { castPerson } from '../cast/known-person';
+import { type CastPerson, castPerson } from '../cast/known-person';
 import type { MemberInfo } from '../common/access.decorator';
 import { Problem } from '../common/problem';
 import { FitCheckService } from '../fit-checks/fit-check.service';
@@ -11,6 +10,7 @@ import { DraftDto, type SaveDraftDto } from './dto/draft.dto';
 import type { DesignedSet } from './entities/designed-set.entity';
 import { type Counts, SetDraft } from './entities/set-draft.entity';
 import { readSentDocument } from './sent-document';
+import { castIdsOf, SeatedPeople } from './seated-people.service';
 import { SetAccess } from './set-access';
 
 /** Drafts of a set that stay, so that a stale save can be compared with what it began from. */
@@ -23,7 +23,7 @@ export class DraftsService {
   constructor(
     @InjectRepository(SetDraft) private readonly drafts: Repository<SetDraft>,
     private readonly access: SetAccess,
-    private readonly cast: CastService,
+    private readonly people: SeatedPeople,
     private readonly fit: FitCheckService,
   ) {}
 
@@ -68,7 +68,7 @@ export class DraftsService {
       number: set.draftNumber,
       document,
       counts,
-      countedAt: new Date(),
+      countedAt: () => 'now()',
       savedById: member.userId,
     });
   }
@@ -76,7 +76,7 @@ export class DraftsService {
   /** A document somebody sent: read, and everyone at its places belongs to the production. */
   async readSent(productionId: string, sent: unknown): Promise<SetDocument> {
     const document = readSentDocument(sent);
-    const known = new Set((await this.cast.everyone(productionId)).map(({ id }) => id));
+    const known = new Set((await this.people.of(productionId, [document])).map(({ id }) => id));
     const strangers = document.seating.flatMap(({ sitter }, index) =>
       sitter.kind === 'cast' && !known.has(sitter.castId)
         ? [
@@ -99,9 +99,15 @@ export class DraftsService {
       where: sets.map(({ id, draftNumber }) => ({ setId: id, number: draftNumber })),
       relations: { savedBy: true },
     });
-    const people = await this.cast.everyone(productionId);
-    const changedAt = Math.max(0, ...people.map(({ updatedAt }) => updatedAt.getTime()));
-    for (const draft of found.filter(({ countedAt }) => countedAt.getTime() < changedAt)) {
+    const people = await this.people.of(
+      productionId,
+      found.map(({ document }) => document),
+    );
+    for (const draft of found) {
+      const ids = new Set(castIdsOf(draft.document));
+      const changes = people.filter(({ id }) => ids.has(id)).map(({ updatedAt }) => updatedAt.getTime());
+      const changedAt = Math.max(0, ...changes);
+      if (draft.countedAt.getTime() >= changedAt) continue;
       draft.counts = this.countsOf(draft.document, people.map(castPerson));
       draft.countedAt = new Date(changedAt);
       const { setId, number, counts, countedAt } = draft;
@@ -115,11 +121,11 @@ export class DraftsService {
     document: SetDocument,
     manager: EntityManager,
   ): Promise<Counts | null> {
-    return this.countsOf(document, (await this.cast.everyone(productionId, manager)).map(castPerson));
+    return this.countsOf(document, (await this.people.of(productionId, [document], manager)).map(castPerson));
   }
 
   /** A save is never lost because its checks could not be made. */
-  private countsOf(document: SetDocument, people: ReturnType<typeof castPerson>[]): Counts | null {
+  private countsOf(document: SetDocument, people: CastPerson[]): Counts | null {
     try {
       return this.fit.sheetFor(document, people).counts;
     } catch (fault) {

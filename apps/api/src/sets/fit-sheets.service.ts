@@ -1,7 +1,6 @@
 import type { FitSheet } from '@settlewright/anthropometry';
 import type { SetDocument } from '@settlewright/geometry';
 import { Injectable } from '@nestjs/common';
-import { CastService } from '../cast/cast.service';
 import { type CastPerson, castPerson } from '../cast/known-person';
 import { seesMeasures } from '../cast/sees-measures';
 import type { MemberInfo } from '../common/access.decorator';
@@ -11,6 +10,7 @@ import { type VerdictSheet, verdictsOnly } from '../fit-checks/verdicts-only';
 import { DraftsService } from './drafts.service';
 import type { SetDraft } from './entities/set-draft.entity';
 import type { SetRevision } from './entities/set-revision.entity';
+import { SeatedPeople } from './seated-people.service';
 
 /** A sheet as far as its reader may see it. */
 export type SeenSheet =
@@ -20,7 +20,7 @@ export type SeenSheet =
 export class FitSheetsService {
   constructor(
     private readonly drafts: DraftsService,
-    private readonly cast: CastService,
+    private readonly seated: SeatedPeople,
     private readonly fit: FitCheckService,
   ) {}
 
@@ -31,14 +31,19 @@ export class FitSheetsService {
     setId: string,
   ): Promise<{ draft: SetDraft; sheet: FitSheet; shown: SeenSheet }> {
     const draft = await this.drafts.get(member, productionId, setId);
-    const people = await this.people(productionId);
+    const people = await this.people(productionId, draft.document);
     const sheet = this.fit.sheetFor(draft.document, people);
     return { draft, sheet, shown: this.shown(member, sheet, draft.document, people) };
   }
 
   /** The sheet of a revision as it was stored, as far as the caller may see it. */
   async ofRevision(member: MemberInfo, productionId: string, revision: SetRevision): Promise<SeenSheet> {
-    return this.shown(member, revision.fitSheet, revision.document, await this.people(productionId));
+    return this.shown(
+      member,
+      revision.fitSheet,
+      revision.document,
+      await this.people(productionId, revision.document),
+    );
   }
 
   private shown(member: MemberInfo, sheet: FitSheet, document: SetDocument, people: CastPerson[]): SeenSheet {
@@ -46,7 +51,7 @@ export class FitSheetsService {
     return { detail: 'verdicts', ...verdictsOnly(sheet), bodies: this.fit.bodiesFor(document, people) };
   }
 
-  private async people(productionId: string): Promise<CastPerson[]> {
-    return (await this.cast.everyone(productionId)).map(castPerson);
+  private async people(productionId: string, document: SetDocument): Promise<CastPerson[]> {
+    return (await this.seated.of(productionId, [document])).map(castPerson);
   }
 }

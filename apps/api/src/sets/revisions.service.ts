@@ -3,7 +3,6 @@ import { Injectable } from '@nestjs/common';
 import { InjectRepository } from '@nestjs/typeorm';
 import { type EntityManager, In, type Repository } from 'typeorm';
 import { AuditService } from '../audit/audit.service';
-import { CastService } from '../cast/cast.service';
 import { castPerson } from '../cast/known-person';
 import type { MemberInfo } from '../common/access.decorator';
 import type { Page, PageQuery } from '../common/page.dto';
@@ -11,11 +10,13 @@ import { Problem } from '../common/problem';
 import { readPage } from '../common/read-page';
 import { FitCheckService } from '../fit-checks/fit-check.service';
 import { withoutPerson } from '../fit-checks/without-person';
+import { ProductionsService } from '../productions/productions.service';
 import { DraftsService } from './drafts.service';
 import { type ApproveRevisionDto, type IssueRevisionDto, RevisionDto } from './dto/revision.dto';
 import { RevisionApproval } from './entities/revision-approval.entity';
 import { SetRevision } from './entities/set-revision.entity';
 import { revisionLetter } from './letters';
+import { SeatedPeople } from './seated-people.service';
 import { SetAccess } from './set-access';
 
 @Injectable()
@@ -24,7 +25,8 @@ export class RevisionsService {
     @InjectRepository(SetRevision) private readonly revisions: Repository<SetRevision>,
     private readonly access: SetAccess,
     private readonly drafts: DraftsService,
-    private readonly cast: CastService,
+    private readonly productions: ProductionsService,
+    private readonly people: SeatedPeople,
     private readonly fit: FitCheckService,
     private readonly audit: AuditService,
   ) {}
@@ -38,13 +40,15 @@ export class RevisionsService {
   ): Promise<RevisionDto> {
     await this.access.forChanging(member, productionId, setId);
     const id = await this.revisions.manager.transaction(async (manager) => {
+      // Somebody who is being erased must not stand on a sheet that is stored a moment later.
+      await this.productions.lockPeople(manager, productionId);
       const set = await this.access.locked(manager, setId);
       if (set.draftNumber !== dto.baseNumber) {
         const detail = `Draft ${dto.baseNumber} was to be issued, but the set is at draft ${set.draftNumber}.`;
         throw Problem.conflict('draft-moved-on', detail, { currentNumber: set.draftNumber });
       }
       const { document } = await this.drafts.inForce(set, manager);
-      const people = await this.cast.everyone(productionId, manager);
+      const people = await this.people.of(productionId, [document], manager);
       const fitSheet = this.fit.sheetFor(document, people.map(castPerson));
       const ordinal = (await manager.countBy(SetRevision, { setId })) + 1;
       const revision = await manager.save(

@@ -21,6 +21,7 @@ import { NotesController } from './notes.controller';
 import { NotesService } from './notes.service';
 import { RevisionsController } from './revisions.controller';
 import { RevisionsService } from './revisions.service';
+import { SeatedPeople } from './seated-people.service';
 import { SetAccess } from './set-access';
 import { SetsController } from './sets.controller';
 import { SetsService } from './sets.service';
@@ -43,6 +44,7 @@ import { SetsService } from './sets.service';
   ],
   providers: [
     SetAccess,
+    SeatedPeople,
     SetsService,
     DraftsService,
     RevisionsService,

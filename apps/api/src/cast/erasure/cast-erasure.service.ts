@@ -16,17 +16,16 @@ export class CastErasureService {
   ) {}
 
   async erase(member: MemberInfo, productionId: string, castId: string): Promise<void> {
-    const person = await this.cast.find(member, productionId, castId);
+    await this.cast.find(member, productionId, castId);
     await this.dataSource.transaction(async (manager) => {
-      const { id, name } = person;
-      const newName = await this.cast.removePersonalData(manager, person);
-      await this.revisions.removePerson(manager, productionId, { id, name }, newName);
+      const { name, newName } = await this.cast.removePersonalData(manager, productionId, castId);
+      await this.revisions.removePerson(manager, productionId, { id: castId, name }, newName);
       await this.audit.record(manager, {
         workshopId: member.workshopId,
         userId: member.userId,
         action: 'cast.erased',
         subjectType: 'cast-member',
-        subjectId: id,
+        subjectId: castId,
       });
     });
   }
