@@ -50,3 +50,5 @@ export type { CushionCut, CushionSize } from './cushions/cushion-sizes.ts';
 export type * from './cushions/cushion-spec.ts';
 export { deriveCushions } from './cushions/derive-cushions.ts';
 export { groupCushions } from './cushions/group-cushions.ts';
+export type { TapeLine } from './tapes/tape-line.ts';
+export { tapeLines, type TapeBody } from './tapes/tape-lines.ts';
