@@ -1,0 +1,43 @@
+import { randomUUID } from 'node:crypto';
+import type { Shop } from '../factories/shop';
+
+const W = '/workshops/{workshopId}';
+const P = `${W}/productions/{productionId}`;
+const S = `${P}/sets/{setId}`;
+const O = `${P}/orders/{orderId}`;
+
+/** A body that each changing route accepts; routes that take none are not listed. */
+export function bodiesFor(shop: Shop): Record<string, object> {
+  const { setId, letter, upholstererId } = shop.parameters;
+  const email = `${randomUUID()}@people.test`;
+  const csv = 'name,stature (mm)\nSomebody Else,1700\n';
+  return {
+    'POST /workshops': { name: 'Another' },
+    'PATCH /auth/me': { name: 'Renamed' },
+    'POST /auth/email/change': { newEmail: email, password: 'not asked again' },
+    [`PATCH ${W}`]: { telephone: '555 01 02' },
+    [`PATCH ${W}/members/{userId}`]: { role: 'reviewer' },
+    [`POST ${W}/invitations`]: { email, role: 'reviewer' },
+    [`POST ${W}/productions`]: { name: 'Another' },
+    [`PATCH ${P}`]: { summary: 'Longer' },
+    [`POST ${P}/cast`]: { name: 'Somebody' },
+    [`PATCH ${P}/cast/{castId}`]: { clothing: 'heavy' },
+    [`POST ${P}/cast/import/preview`]: { csv },
+    [`POST ${P}/cast/import`]: { csv },
+    [`POST ${P}/sets`]: { name: 'Another' },
+    [`PATCH ${S}`]: { name: 'Renamed' },
+    [`PUT ${S}/draft`]: { baseNumber: shop.draftNumber, document: shop.document },
+    [`POST ${S}/revisions`]: { baseNumber: shop.draftNumber, note: '' },
+    [`POST ${S}/revisions/{letter}/approval`]: { decision: 'approved', comment: '' },
+    [`POST ${S}/notes`]: { text: 'Looks right', kind: 'comment' },
+    [`PATCH ${S}/notes/{noteId}`]: { resolved: true },
+    [`PUT ${S}/built`]: { partId: shop.partId, built: true },
+    [`POST ${W}/upholsterers`]: { name: 'Another', email },
+    [`PATCH ${W}/upholsterers/{upholstererId}`]: { notes: 'Closed on Mondays' },
+    [`POST ${P}/orders`]: { setId, revisionLetter: letter, title: 'More' },
+    [`PATCH ${O}`]: { title: 'Other' },
+    [`POST ${O}/send`]: { upholstererId },
+    [`POST ${O}/state`]: { to: 'agreed' },
+    [`POST ${O}/messages`]: { text: 'When?' },
+  };
+}

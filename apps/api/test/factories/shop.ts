@@ -1,0 +1,119 @@
+import { deriveParts, type SetDocument } from '@settlewright/geometry';
+import type { Role } from '../../src/common/access.decorator';
+import type { TestApp } from '../test-app';
+import { mailedToken } from './mails';
+import { as, createMember, createWorkshop, type Person } from './people';
+
+/** Numbers and words that stand nowhere else, so that they are found wherever they leak. */
+export const PRIVATE = {
+  name: 'Wilhelmina Quist',
+  notes: 'asks for a footstool',
+  statureMm: 1871.5,
+  weightKg: 83.25,
+  poplitealMm: 457.5,
+  shoeMm: 31.5,
+};
+
+/** A workshop with one of everything, made through its own routes by its owner. */
+export interface Shop {
+  people: Record<Role, Person> & { spare: Person };
+  /** what stands in the braces of the paths */
+  parameters: Record<string, string>;
+  /** a seated document, as saved */
+  document: SetDocument;
+  draftNumber: number;
+  partId: string;
+  linkToken: string;
+}
+
+interface DraftBody {
+  number: number;
+  document: SetDocument;
+}
+
+export async function createShop(test: TestApp, name: string): Promise<Shop> {
+  const { id: workshopId, owner } = await createWorkshop(test, name);
+  const people = {
+    owner,
+    designer: await createMember(test, workshopId, 'designer'),
+    carpenter: await createMember(test, workshopId, 'carpenter'),
+    reviewer: await createMember(test, workshopId, 'reviewer'),
+    spare: await createMember(test, workshopId, 'reviewer'),
+  };
+  const make = async <T = { id: string }>(path: string, body: object, status = 201): Promise<T> => {
+    const made = await as(test, owner).post(path).send(body);
+    if (made.status !== status) throw new Error(`POST ${path}: ${made.status} ${made.text}`);
+    return made.body as T;
+  };
+  const W = `/workshops/${workshopId}`;
+  const production = await make(`${W}/productions`, { name: 'The night train' });
+  const P = `${W}/productions/${production.id}`;
+  const { statureMm, weightKg, poplitealMm, shoeMm, notes } = PRIVATE;
+  const person = await make(`${P}/cast`, {
+    name: PRIVATE.name,
+    role: 'the conductor',
+    bodyData: 'women',
+    statureMm,
+    statureSource: 'measured',
+    weightKg,
+    measured: { popliteal_height: { mm: poplitealMm } },
+    shoeMm,
+    notes,
+  });
+  const set = await make(`${P}/sets`, { name: 'Compartment', arrangement: 'bench-window' });
+  const S = `${P}/sets/${set.id}`;
+  const draft = await seat(test, owner, S, person.id);
+  const revision = await make<{ letter: string }>(`${S}/revisions`, {
+    baseNumber: draft.number,
+    note: 'to sit in',
+  });
+  const note = await make(`${S}/notes`, { text: 'Mind the sill', kind: 'comment' });
+  const email = `upholsterer-${workshopId}@cushions.test`;
+  const upholsterer = await make(`${W}/upholsterers`, { name: 'Cushions and Sons', email });
+  const order = await make(`${P}/orders`, {
+    setId: set.id,
+    revisionLetter: revision.letter,
+    title: 'Seats and backs',
+  });
+  await make(`${P}/orders/${order.id}/send`, { upholstererId: upholsterer.id }, 200);
+  const invitation = await make(`${W}/invitations`, {
+    email: `guest-${workshopId}@people.test`,
+    role: 'reviewer',
+  });
+  const bench = draft.document.pieces.find(({ kind }) => kind === 'bench');
+  return {
+    people,
+    parameters: {
+      workshopId,
+      userId: people.spare.id,
+      invitationId: invitation.id,
+      productionId: production.id,
+      castId: person.id,
+      setId: set.id,
+      letter: revision.letter,
+      noteId: note.id,
+      upholstererId: upholsterer.id,
+      orderId: order.id,
+    },
+    document: draft.document,
+    draftNumber: draft.number,
+    partId: firstPartOf(draft.document, bench?.id ?? ''),
+    linkToken: await mailedToken(test, email, 'cushion-order'),
+  };
+}
+
+async function seat(test: TestApp, owner: Person, S: string, castId: string): Promise<DraftBody> {
+  const { number, document } = (await as(test, owner).get(`${S}/draft`).expect(200)).body as DraftBody;
+  const bench = document.pieces.find(({ kind }) => kind === 'bench');
+  if (!bench) throw new Error('the arrangement has no bench to sit on');
+  document.seating = [{ pieceId: bench.id, place: 1, sitter: { kind: 'cast', castId } }];
+  const saved = await as(test, owner).put(`${S}/draft`).send({ baseNumber: number, document });
+  if (saved.status !== 200) throw new Error(`PUT ${S}/draft: ${saved.status} ${saved.text}`);
+  return { number: (saved.body as { number: number }).number, document };
+}
+
+function firstPartOf(document: SetDocument, pieceId: string): string {
+  const part = deriveParts(document).find((one) => one.pieceId === pieceId);
+  if (!part) throw new Error('the bench has no parts');
+  return part.id;
+}
