@@ -357,6 +357,710 @@ export interface paths {
         patch?: never;
         trace?: never;
     };
+    "/api/workshops/{workshopId}/productions": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        get: operations["Productions_list"];
+        put?: never;
+        post: operations["Productions_create"];
+        delete?: never;
+        options?: never;
+        head?: never;
+        patch?: never;
+        trace?: never;
+    };
+    "/api/workshops/{workshopId}/productions/{productionId}": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        get: operations["Productions_get"];
+        put?: never;
+        post?: never;
+        delete?: never;
+        options?: never;
+        head?: never;
+        patch: operations["Productions_patch"];
+        trace?: never;
+    };
+    "/api/workshops/{workshopId}/productions/{productionId}/archive": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        get?: never;
+        put?: never;
+        post: operations["Productions_archive"];
+        delete?: never;
+        options?: never;
+        head?: never;
+        patch?: never;
+        trace?: never;
+    };
+    "/api/workshops/{workshopId}/productions/{productionId}/restore": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        get?: never;
+        put?: never;
+        post: operations["Productions_restore"];
+        delete?: never;
+        options?: never;
+        head?: never;
+        patch?: never;
+        trace?: never;
+    };
+    "/api/workshops/{workshopId}/productions/{productionId}/cast": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        get: operations["Cast_list"];
+        put?: never;
+        post: operations["Cast_create"];
+        delete?: never;
+        options?: never;
+        head?: never;
+        patch?: never;
+        trace?: never;
+    };
+    "/api/workshops/{workshopId}/productions/{productionId}/cast/import/preview": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        get?: never;
+        put?: never;
+        post: operations["Cast_preview"];
+        delete?: never;
+        options?: never;
+        head?: never;
+        patch?: never;
+        trace?: never;
+    };
+    "/api/workshops/{workshopId}/productions/{productionId}/cast/import": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        get?: never;
+        put?: never;
+        post: operations["Cast_import"];
+        delete?: never;
+        options?: never;
+        head?: never;
+        patch?: never;
+        trace?: never;
+    };
+    "/api/workshops/{workshopId}/productions/{productionId}/cast/{castId}": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        get?: never;
+        put?: never;
+        post?: never;
+        delete: operations["CastErasure_erase"];
+        options?: never;
+        head?: never;
+        patch: operations["Cast_patch"];
+        trace?: never;
+    };
+    "/api/workshops/{workshopId}/productions/{productionId}/cast.csv": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        get: operations["CastFiles_csv"];
+        put?: never;
+        post?: never;
+        delete?: never;
+        options?: never;
+        head?: never;
+        patch?: never;
+        trace?: never;
+    };
+    "/api/workshops/{workshopId}/productions/{productionId}/cast/{castId}/export": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        get: operations["CastFiles_export"];
+        put?: never;
+        post?: never;
+        delete?: never;
+        options?: never;
+        head?: never;
+        patch?: never;
+        trace?: never;
+    };
+    "/api/workshops/{workshopId}/productions/{productionId}/sets": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        get: operations["Sets_list"];
+        put?: never;
+        post: operations["Sets_create"];
+        delete?: never;
+        options?: never;
+        head?: never;
+        patch?: never;
+        trace?: never;
+    };
+    "/api/workshops/{workshopId}/productions/{productionId}/sets/{setId}": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        get: operations["Sets_get"];
+        put?: never;
+        post?: never;
+        delete?: never;
+        options?: never;
+        head?: never;
+        patch: operations["Sets_rename"];
+        trace?: never;
+    };
+    "/api/workshops/{workshopId}/productions/{productionId}/sets/{setId}/duplicate": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        get?: never;
+        put?: never;
+        post: operations["Sets_duplicate"];
+        delete?: never;
+        options?: never;
+        head?: never;
+        patch?: never;
+        trace?: never;
+    };
+    "/api/workshops/{workshopId}/productions/{productionId}/sets/{setId}/archive": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        get?: never;
+        put?: never;
+        post: operations["Sets_archive"];
+        delete?: never;
+        options?: never;
+        head?: never;
+        patch?: never;
+        trace?: never;
+    };
+    "/api/workshops/{workshopId}/productions/{productionId}/sets/{setId}/restore": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        get?: never;
+        put?: never;
+        post: operations["Sets_restore"];
+        delete?: never;
+        options?: never;
+        head?: never;
+        patch?: never;
+        trace?: never;
+    };
+    "/api/workshops/{workshopId}/productions/{productionId}/sets/{setId}/draft": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        get: operations["Drafts_get"];
+        put: operations["Drafts_save"];
+        post?: never;
+        delete?: never;
+        options?: never;
+        head?: never;
+        patch?: never;
+        trace?: never;
+    };
+    "/api/workshops/{workshopId}/productions/{productionId}/sets/{setId}/draft/fit-sheet": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        get: operations["Drafts_fitSheet"];
+        put?: never;
+        post?: never;
+        delete?: never;
+        options?: never;
+        head?: never;
+        patch?: never;
+        trace?: never;
+    };
+    "/api/workshops/{workshopId}/productions/{productionId}/sets/{setId}/revisions": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        get: operations["Revisions_list"];
+        put?: never;
+        post: operations["Revisions_issue"];
+        delete?: never;
+        options?: never;
+        head?: never;
+        patch?: never;
+        trace?: never;
+    };
+    "/api/workshops/{workshopId}/productions/{productionId}/sets/{setId}/revisions/{letter}": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        get: operations["Revisions_get"];
+        put?: never;
+        post?: never;
+        delete?: never;
+        options?: never;
+        head?: never;
+        patch?: never;
+        trace?: never;
+    };
+    "/api/workshops/{workshopId}/productions/{productionId}/sets/{setId}/revisions/{letter}/approval": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        get?: never;
+        put?: never;
+        post: operations["Revisions_approve"];
+        delete?: never;
+        options?: never;
+        head?: never;
+        patch?: never;
+        trace?: never;
+    };
+    "/api/workshops/{workshopId}/productions/{productionId}/sets/{setId}/draft/fit-sheet.csv": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        get: operations["FitSheetFiles_draftCsv"];
+        put?: never;
+        post?: never;
+        delete?: never;
+        options?: never;
+        head?: never;
+        patch?: never;
+        trace?: never;
+    };
+    "/api/workshops/{workshopId}/productions/{productionId}/sets/{setId}/draft/fit-sheet.pdf": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        get: operations["FitSheetFiles_draftPdf"];
+        put?: never;
+        post?: never;
+        delete?: never;
+        options?: never;
+        head?: never;
+        patch?: never;
+        trace?: never;
+    };
+    "/api/workshops/{workshopId}/productions/{productionId}/sets/{setId}/revisions/{letter}/fit-sheet.csv": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        get: operations["FitSheetFiles_revisionCsv"];
+        put?: never;
+        post?: never;
+        delete?: never;
+        options?: never;
+        head?: never;
+        patch?: never;
+        trace?: never;
+    };
+    "/api/workshops/{workshopId}/productions/{productionId}/sets/{setId}/revisions/{letter}/fit-sheet.pdf": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        get: operations["FitSheetFiles_revisionPdf"];
+        put?: never;
+        post?: never;
+        delete?: never;
+        options?: never;
+        head?: never;
+        patch?: never;
+        trace?: never;
+    };
+    "/api/workshops/{workshopId}/productions/{productionId}/sets/{setId}/notes": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        get: operations["Notes_list"];
+        put?: never;
+        post: operations["Notes_create"];
+        delete?: never;
+        options?: never;
+        head?: never;
+        patch?: never;
+        trace?: never;
+    };
+    "/api/workshops/{workshopId}/productions/{productionId}/sets/{setId}/notes/{noteId}": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        get?: never;
+        put?: never;
+        post?: never;
+        delete?: never;
+        options?: never;
+        head?: never;
+        patch: operations["Notes_resolve"];
+        trace?: never;
+    };
+    "/api/workshops/{workshopId}/productions/{productionId}/sets/{setId}/built": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        get: operations["BuiltParts_list"];
+        put: operations["BuiltParts_tick"];
+        post?: never;
+        delete?: never;
+        options?: never;
+        head?: never;
+        patch?: never;
+        trace?: never;
+    };
+    "/api/workshops/{workshopId}/upholsterers": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        get: operations["Upholsterers_list"];
+        put?: never;
+        post: operations["Upholsterers_create"];
+        delete?: never;
+        options?: never;
+        head?: never;
+        patch?: never;
+        trace?: never;
+    };
+    "/api/workshops/{workshopId}/upholsterers/{upholstererId}": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        get?: never;
+        put?: never;
+        post?: never;
+        delete: operations["Upholsterers_remove"];
+        options?: never;
+        head?: never;
+        patch: operations["Upholsterers_update"];
+        trace?: never;
+    };
+    "/api/workshops/{workshopId}/productions/{productionId}/orders": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        get: operations["Orders_list"];
+        put?: never;
+        post: operations["Orders_create"];
+        delete?: never;
+        options?: never;
+        head?: never;
+        patch?: never;
+        trace?: never;
+    };
+    "/api/workshops/{workshopId}/productions/{productionId}/orders/{orderId}": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        get: operations["Orders_get"];
+        put?: never;
+        post?: never;
+        delete?: never;
+        options?: never;
+        head?: never;
+        patch: operations["Orders_update"];
+        trace?: never;
+    };
+    "/api/workshops/{workshopId}/productions/{productionId}/orders/{orderId}/spec.pdf": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        get: operations["Orders_specPdf"];
+        put?: never;
+        post?: never;
+        delete?: never;
+        options?: never;
+        head?: never;
+        patch?: never;
+        trace?: never;
+    };
+    "/api/workshops/{workshopId}/productions/{productionId}/orders/{orderId}/send": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        get?: never;
+        put?: never;
+        post: operations["Orders_send"];
+        delete?: never;
+        options?: never;
+        head?: never;
+        patch?: never;
+        trace?: never;
+    };
+    "/api/workshops/{workshopId}/productions/{productionId}/orders/{orderId}/cancel": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        get?: never;
+        put?: never;
+        post: operations["Orders_cancel"];
+        delete?: never;
+        options?: never;
+        head?: never;
+        patch?: never;
+        trace?: never;
+    };
+    "/api/workshops/{workshopId}/productions/{productionId}/orders/{orderId}/state": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        get?: never;
+        put?: never;
+        post: operations["Orders_recordState"];
+        delete?: never;
+        options?: never;
+        head?: never;
+        patch?: never;
+        trace?: never;
+    };
+    "/api/workshops/{workshopId}/productions/{productionId}/orders/{orderId}/messages": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        get: operations["Orders_messages"];
+        put?: never;
+        post: operations["Orders_write"];
+        delete?: never;
+        options?: never;
+        head?: never;
+        patch?: never;
+        trace?: never;
+    };
+    "/api/workshops/{workshopId}/productions/{productionId}/orders/{orderId}/mail/send-again": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        get?: never;
+        put?: never;
+        post: operations["Orders_sendMailAgain"];
+        delete?: never;
+        options?: never;
+        head?: never;
+        patch?: never;
+        trace?: never;
+    };
+    "/api/workshops/{workshopId}/productions/{productionId}/orders/{orderId}/link/revoke": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        get?: never;
+        put?: never;
+        post: operations["Orders_revokeLink"];
+        delete?: never;
+        options?: never;
+        head?: never;
+        patch?: never;
+        trace?: never;
+    };
+    "/api/workshops/{workshopId}/productions/{productionId}/orders/{orderId}/link/renew": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        get?: never;
+        put?: never;
+        post: operations["Orders_renewLink"];
+        delete?: never;
+        options?: never;
+        head?: never;
+        patch?: never;
+        trace?: never;
+    };
+    "/api/link/{token}": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        get: operations["Link_read"];
+        put?: never;
+        post?: never;
+        delete?: never;
+        options?: never;
+        head?: never;
+        patch?: never;
+        trace?: never;
+    };
+    "/api/link/{token}/spec.pdf": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        get: operations["Link_specPdf"];
+        put?: never;
+        post?: never;
+        delete?: never;
+        options?: never;
+        head?: never;
+        patch?: never;
+        trace?: never;
+    };
+    "/api/link/{token}/acknowledge": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        get?: never;
+        put?: never;
+        post: operations["Link_acknowledge"];
+        delete?: never;
+        options?: never;
+        head?: never;
+        patch?: never;
+        trace?: never;
+    };
+    "/api/link/{token}/reply": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        get?: never;
+        put?: never;
+        post: operations["Link_reply"];
+        delete?: never;
+        options?: never;
+        head?: never;
+        patch?: never;
+        trace?: never;
+    };
+    "/api/workshops/{workshopId}/productions/{productionId}/duplicate": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        get?: never;
+        put?: never;
+        post: operations["ProductionDuplication_duplicate"];
+        delete?: never;
+        options?: never;
+        head?: never;
+        patch?: never;
+        trace?: never;
+    };
 }
 export type webhooks = Record<string, never>;
 export interface components {
@@ -508,11 +1212,1155 @@ export interface components {
             /** @description not asked of somebody who is signed in with this address */
             password?: string;
         };
+        ProductionDto: {
+            /** Format: uuid */
+            id: string;
+            name: string;
+            summary: string;
+            /** @enum {string} */
+            units: "feet-inches" | "decimal-inches" | "millimetres";
+            /** @enum {number} */
+            roundTo: 16 | 8;
+            /** @enum {string} */
+            status: "active" | "archived";
+            /** Format: date-time */
+            createdAt: string;
+            /** Format: date-time */
+            updatedAt: string;
+        };
+        ProductionPage: {
+            items: components["schemas"]["ProductionDto"][];
+            total: number;
+            page: number;
+            pageSize: number;
+        };
+        CreateProductionDto: {
+            name: string;
+            summary?: string;
+            /**
+             * @default feet-inches
+             * @enum {string}
+             */
+            units: "feet-inches" | "decimal-inches" | "millimetres";
+            /**
+             * @description n of the 1/n inch that shown lengths are rounded to
+             * @default 16
+             * @enum {number}
+             */
+            roundTo: 16 | 8;
+        };
+        PatchProductionDto: {
+            name?: string;
+            summary?: string;
+            /**
+             * @default feet-inches
+             * @enum {string}
+             */
+            units: "feet-inches" | "decimal-inches" | "millimetres";
+            /**
+             * @description n of the 1/n inch that shown lengths are rounded to
+             * @default 16
+             * @enum {number}
+             */
+            roundTo: 16 | 8;
+        };
+        CastMemberDto: {
+            /** Format: uuid */
+            id: string;
+            name: string;
+            role: string;
+            colour: number;
+            /** @enum {string} */
+            bodyData: "women" | "men" | "mixed";
+            statureMm?: number;
+            /** @enum {string} */
+            statureSource: "measured" | "told";
+            weightKg?: number;
+            measured: {
+                sitting_height?: {
+                    mm: number;
+                    takenBy?: string;
+                    /** Format: date */
+                    takenOn?: string;
+                };
+                eye_height_sitting?: {
+                    mm: number;
+                    takenBy?: string;
+                    /** Format: date */
+                    takenOn?: string;
+                };
+                acromial_height_sitting?: {
+                    mm: number;
+                    takenBy?: string;
+                    /** Format: date */
+                    takenOn?: string;
+                };
+                elbow_rest_height?: {
+                    mm: number;
+                    takenBy?: string;
+                    /** Format: date */
+                    takenOn?: string;
+                };
+                popliteal_height?: {
+                    mm: number;
+                    takenBy?: string;
+                    /** Format: date */
+                    takenOn?: string;
+                };
+                knee_height_sitting?: {
+                    mm: number;
+                    takenBy?: string;
+                    /** Format: date */
+                    takenOn?: string;
+                };
+                buttock_popliteal_length?: {
+                    mm: number;
+                    takenBy?: string;
+                    /** Format: date */
+                    takenOn?: string;
+                };
+                buttock_knee_length?: {
+                    mm: number;
+                    takenBy?: string;
+                    /** Format: date */
+                    takenOn?: string;
+                };
+                thigh_clearance?: {
+                    mm: number;
+                    takenBy?: string;
+                    /** Format: date */
+                    takenOn?: string;
+                };
+                hip_breadth_sitting?: {
+                    mm: number;
+                    takenBy?: string;
+                    /** Format: date */
+                    takenOn?: string;
+                };
+                bideltoid_breadth?: {
+                    mm: number;
+                    takenBy?: string;
+                    /** Format: date */
+                    takenOn?: string;
+                };
+                forearm_forearm_breadth?: {
+                    mm: number;
+                    takenBy?: string;
+                    /** Format: date */
+                    takenOn?: string;
+                };
+                abdominal_extension_depth_sitting?: {
+                    mm: number;
+                    takenBy?: string;
+                    /** Format: date */
+                    takenOn?: string;
+                };
+            };
+            shoeMm: number;
+            /** @enum {string} */
+            clothing: "light" | "medium" | "heavy";
+            notes: string;
+            /** Format: date-time */
+            createdAt: string;
+            /** @description the person was erased and still holds a place in a draft */
+            removed: boolean;
+        };
+        CastNameDto: {
+            /** Format: uuid */
+            id: string;
+            name: string;
+            role: string;
+            colour: number;
+        };
+        CastPageDto: {
+            /** @description owner and designer get CastMemberDto, carpenter and reviewer CastNameDto */
+            items: (components["schemas"]["CastMemberDto"] | components["schemas"]["CastNameDto"])[];
+            total: number;
+            page: number;
+            pageSize: number;
+        };
+        CreateCastMemberDto: {
+            name: string;
+            /** @description the part: "the conductor" */
+            role?: string;
+            /**
+             * @default mixed
+             * @enum {string}
+             */
+            bodyData: "women" | "men" | "mixed";
+            statureMm?: number | null;
+            /**
+             * @default told
+             * @enum {string}
+             */
+            statureSource: "measured" | "told";
+            weightKg?: number | null;
+            /** @description all that was taken with a tape; replaces what was there */
+            measured?: {
+                sitting_height?: {
+                    mm: number;
+                    takenBy?: string;
+                    /** Format: date */
+                    takenOn?: string;
+                };
+                eye_height_sitting?: {
+                    mm: number;
+                    takenBy?: string;
+                    /** Format: date */
+                    takenOn?: string;
+                };
+                acromial_height_sitting?: {
+                    mm: number;
+                    takenBy?: string;
+                    /** Format: date */
+                    takenOn?: string;
+                };
+                elbow_rest_height?: {
+                    mm: number;
+                    takenBy?: string;
+                    /** Format: date */
+                    takenOn?: string;
+                };
+                popliteal_height?: {
+                    mm: number;
+                    takenBy?: string;
+                    /** Format: date */
+                    takenOn?: string;
+                };
+                knee_height_sitting?: {
+                    mm: number;
+                    takenBy?: string;
+                    /** Format: date */
+                    takenOn?: string;
+                };
+                buttock_popliteal_length?: {
+                    mm: number;
+                    takenBy?: string;
+                    /** Format: date */
+                    takenOn?: string;
+                };
+                buttock_knee_length?: {
+                    mm: number;
+                    takenBy?: string;
+                    /** Format: date */
+                    takenOn?: string;
+                };
+                thigh_clearance?: {
+                    mm: number;
+                    takenBy?: string;
+                    /** Format: date */
+                    takenOn?: string;
+                };
+                hip_breadth_sitting?: {
+                    mm: number;
+                    takenBy?: string;
+                    /** Format: date */
+                    takenOn?: string;
+                };
+                bideltoid_breadth?: {
+                    mm: number;
+                    takenBy?: string;
+                    /** Format: date */
+                    takenOn?: string;
+                };
+                forearm_forearm_breadth?: {
+                    mm: number;
+                    takenBy?: string;
+                    /** Format: date */
+                    takenOn?: string;
+                };
+                abdominal_extension_depth_sitting?: {
+                    mm: number;
+                    takenBy?: string;
+                    /** Format: date */
+                    takenOn?: string;
+                };
+            };
+            /** @default 25 */
+            shoeMm: number;
+            /**
+             * @default light
+             * @enum {string}
+             */
+            clothing: "light" | "medium" | "heavy";
+            notes?: string;
+            /** @description chosen when absent */
+            colour?: number;
+        };
+        ImportCastDto: {
+            /** @description the text of the file, up to 2 MB and 2,000 rows */
+            csv: string;
+        };
+        CastColumnDto: {
+            /** @description as the file says it */
+            header: string;
+            /** @description what it stands for, as `stature` or `popliteal_height` */
+            key: string;
+            /** @description unit named in the header */
+            unit?: string;
+        };
+        CastRowDto: {
+            name: string;
+            role: string;
+            /** @enum {string} */
+            bodyData: "women" | "men" | "mixed";
+            statureMm?: number;
+            /** @enum {string} */
+            statureSource: "measured" | "told";
+            weightKg?: number;
+            measured: {
+                sitting_height?: {
+                    mm: number;
+                    takenBy?: string;
+                    /** Format: date */
+                    takenOn?: string;
+                };
+                eye_height_sitting?: {
+                    mm: number;
+                    takenBy?: string;
+                    /** Format: date */
+                    takenOn?: string;
+                };
+                acromial_height_sitting?: {
+                    mm: number;
+                    takenBy?: string;
+                    /** Format: date */
+                    takenOn?: string;
+                };
+                elbow_rest_height?: {
+                    mm: number;
+                    takenBy?: string;
+                    /** Format: date */
+                    takenOn?: string;
+                };
+                popliteal_height?: {
+                    mm: number;
+                    takenBy?: string;
+                    /** Format: date */
+                    takenOn?: string;
+                };
+                knee_height_sitting?: {
+                    mm: number;
+                    takenBy?: string;
+                    /** Format: date */
+                    takenOn?: string;
+                };
+                buttock_popliteal_length?: {
+                    mm: number;
+                    takenBy?: string;
+                    /** Format: date */
+                    takenOn?: string;
+                };
+                buttock_knee_length?: {
+                    mm: number;
+                    takenBy?: string;
+                    /** Format: date */
+                    takenOn?: string;
+                };
+                thigh_clearance?: {
+                    mm: number;
+                    takenBy?: string;
+                    /** Format: date */
+                    takenOn?: string;
+                };
+                hip_breadth_sitting?: {
+                    mm: number;
+                    takenBy?: string;
+                    /** Format: date */
+                    takenOn?: string;
+                };
+                bideltoid_breadth?: {
+                    mm: number;
+                    takenBy?: string;
+                    /** Format: date */
+                    takenOn?: string;
+                };
+                forearm_forearm_breadth?: {
+                    mm: number;
+                    takenBy?: string;
+                    /** Format: date */
+                    takenOn?: string;
+                };
+                abdominal_extension_depth_sitting?: {
+                    mm: number;
+                    takenBy?: string;
+                    /** Format: date */
+                    takenOn?: string;
+                };
+            };
+            shoeMm?: number;
+            /** @enum {string} */
+            clothing: "light" | "medium" | "heavy";
+            notes: string;
+        };
+        CellProblemDto: {
+            column: string;
+            read: string;
+            accepted: string;
+            message: string;
+        };
+        CastImportRowDto: {
+            /** @description line of the file; the header stands on line 1 */
+            line: number;
+            /** @description absent when the row cannot be taken */
+            value?: components["schemas"]["CastRowDto"];
+            problems: components["schemas"]["CellProblemDto"][];
+            /** @description worth a look; the row is taken all the same */
+            warnings: components["schemas"]["CellProblemDto"][];
+        };
+        CastImportPreviewDto: {
+            columns: components["schemas"]["CastColumnDto"][];
+            rows: components["schemas"]["CastImportRowDto"][];
+            ignoredColumns: string[];
+        };
+        CastImportDto: {
+            added: number;
+            refused: number;
+            /** @description the refused rows */
+            refusedRows: components["schemas"]["CastImportRowDto"][];
+        };
+        PatchCastMemberDto: {
+            name?: string;
+            /** @description the part: "the conductor" */
+            role?: string;
+            /**
+             * @default mixed
+             * @enum {string}
+             */
+            bodyData: "women" | "men" | "mixed";
+            statureMm?: number | null;
+            /**
+             * @default told
+             * @enum {string}
+             */
+            statureSource: "measured" | "told";
+            weightKg?: number | null;
+            /** @description all that was taken with a tape; replaces what was there */
+            measured?: {
+                sitting_height?: {
+                    mm: number;
+                    takenBy?: string;
+                    /** Format: date */
+                    takenOn?: string;
+                };
+                eye_height_sitting?: {
+                    mm: number;
+                    takenBy?: string;
+                    /** Format: date */
+                    takenOn?: string;
+                };
+                acromial_height_sitting?: {
+                    mm: number;
+                    takenBy?: string;
+                    /** Format: date */
+                    takenOn?: string;
+                };
+                elbow_rest_height?: {
+                    mm: number;
+                    takenBy?: string;
+                    /** Format: date */
+                    takenOn?: string;
+                };
+                popliteal_height?: {
+                    mm: number;
+                    takenBy?: string;
+                    /** Format: date */
+                    takenOn?: string;
+                };
+                knee_height_sitting?: {
+                    mm: number;
+                    takenBy?: string;
+                    /** Format: date */
+                    takenOn?: string;
+                };
+                buttock_popliteal_length?: {
+                    mm: number;
+                    takenBy?: string;
+                    /** Format: date */
+                    takenOn?: string;
+                };
+                buttock_knee_length?: {
+                    mm: number;
+                    takenBy?: string;
+                    /** Format: date */
+                    takenOn?: string;
+                };
+                thigh_clearance?: {
+                    mm: number;
+                    takenBy?: string;
+                    /** Format: date */
+                    takenOn?: string;
+                };
+                hip_breadth_sitting?: {
+                    mm: number;
+                    takenBy?: string;
+                    /** Format: date */
+                    takenOn?: string;
+                };
+                bideltoid_breadth?: {
+                    mm: number;
+                    takenBy?: string;
+                    /** Format: date */
+                    takenOn?: string;
+                };
+                forearm_forearm_breadth?: {
+                    mm: number;
+                    takenBy?: string;
+                    /** Format: date */
+                    takenOn?: string;
+                };
+                abdominal_extension_depth_sitting?: {
+                    mm: number;
+                    takenBy?: string;
+                    /** Format: date */
+                    takenOn?: string;
+                };
+            };
+            /** @default 25 */
+            shoeMm: number;
+            /**
+             * @default light
+             * @enum {string}
+             */
+            clothing: "light" | "medium" | "heavy";
+            notes?: string;
+            /** @description chosen when absent */
+            colour?: number;
+        };
+        PersonDto: {
+            /** Format: uuid */
+            id: string;
+            name: string;
+        };
+        CountsDto: {
+            fits: number;
+            tight: number;
+            wontFit: number;
+            notKnown: number;
+        };
+        ApprovalDto: {
+            /** @enum {string} */
+            decision: "approved" | "changes-wanted";
+            comment: string;
+            /** Format: date-time */
+            decidedAt: string;
+            decidedBy: components["schemas"]["PersonDto"];
+        };
+        RevisionDto: {
+            /** Format: uuid */
+            id: string;
+            /** @description A to Z, then AA */
+            letter: string;
+            /** @description number of the draft it was issued from */
+            number: number;
+            /** Format: date-time */
+            issuedAt: string;
+            issuedBy: components["schemas"]["PersonDto"];
+            note: string;
+            counts: components["schemas"]["CountsDto"];
+            /** @description the latest word on it */
+            approval?: components["schemas"]["ApprovalDto"];
+        };
+        SetDto: {
+            /** Format: uuid */
+            id: string;
+            name: string;
+            /** @enum {string} */
+            status: "active" | "archived";
+            draftNumber: number;
+            /** Format: date-time */
+            savedAt: string;
+            savedBy: components["schemas"]["PersonDto"];
+            lastRevision?: components["schemas"]["RevisionDto"];
+            pieceCount: number;
+            seatedCount: number;
+            /** @description verdicts of the draft; absent when they could not be made */
+            counts?: components["schemas"]["CountsDto"];
+            /** @description SetDocument of the geometry library */
+            document: {
+                [key: string]: unknown;
+            };
+        };
+        SetPage: {
+            items: components["schemas"]["SetDto"][];
+            total: number;
+            page: number;
+            pageSize: number;
+        };
+        CreateSetDto: {
+            name: string;
+            /** @description id of a ready arrangement, as `facing-benches`; `empty` when nothing is given */
+            arrangement?: string;
+            /** @description a set document to begin with, instead of an arrangement */
+            document?: {
+                [key: string]: unknown;
+            };
+        };
+        RenameSetDto: {
+            name: string;
+        };
+        DraftDto: {
+            number: number;
+            /** @description SetDocument of the geometry library */
+            document: {
+                [key: string]: unknown;
+            };
+            /** Format: date-time */
+            savedAt: string;
+            savedBy: components["schemas"]["PersonDto"];
+        };
+        SaveDraftDto: {
+            /** @description number of the draft that the change began from */
+            baseNumber: number;
+            /** @description SetDocument of the geometry library */
+            document: {
+                [key: string]: unknown;
+            };
+        };
+        SavedDraftDto: {
+            number: number;
+            /** Format: date-time */
+            savedAt: string;
+            savedBy: components["schemas"]["PersonDto"];
+        };
         ProblemField: {
             /** @description where in the request, as `rows.0.name` */
             path: string;
             code: string;
             message: string;
+        };
+        DraftBaseDto: {
+            number: number;
+            /** @description SetDocument of the geometry library */
+            document: {
+                [key: string]: unknown;
+            };
+        };
+        DraftConflictDto: {
+            type: string;
+            title: string;
+            status: number;
+            /** @description a word for programs, as `draft-conflict` */
+            code: string;
+            /** @description a sentence for people */
+            detail: string;
+            fields?: components["schemas"]["ProblemField"][];
+            current: components["schemas"]["DraftDto"];
+            /** @description null when it is too long ago to be kept */
+            base: components["schemas"]["DraftBaseDto"] | null;
+        };
+        RoundedBodyDto: {
+            /** @description `pieceId:place` */
+            placeId: string;
+            /** @description millimetres rounded to 20, by body measure; without weight */
+            means: {
+                [key: string]: number;
+            };
+            /** @description millimetres rounded to 20 */
+            shoeMm: number;
+            /** @enum {string} */
+            clothing: "light" | "medium" | "heavy";
+        };
+        FitSheetDto: {
+            /** @enum {string} */
+            detail: "full" | "verdicts";
+            /** @description SitterRow[] of the anthropometry library */
+            rows: {
+                [key: string]: unknown;
+            }[];
+            /** @description PublicRow of the anthropometry library */
+            publicRow: {
+                [key: string]: unknown;
+            };
+            /** @description FitCell[] of the anthropometry library */
+            piecesAndWays: {
+                [key: string]: unknown;
+            }[];
+            emptyPlaceIds: string[];
+            counts: components["schemas"]["CountsDto"];
+            ruleVersion: string;
+            /** @description only with `verdicts` */
+            bodies?: components["schemas"]["RoundedBodyDto"][];
+        };
+        RevisionPage: {
+            items: components["schemas"]["RevisionDto"][];
+            total: number;
+            page: number;
+            pageSize: number;
+        };
+        IssueRevisionDto: {
+            /** @description number of the draft that is to be issued */
+            baseNumber: number;
+            note?: string;
+        };
+        RevisionDetailDto: {
+            /** Format: uuid */
+            id: string;
+            /** @description A to Z, then AA */
+            letter: string;
+            /** @description number of the draft it was issued from */
+            number: number;
+            /** Format: date-time */
+            issuedAt: string;
+            issuedBy: components["schemas"]["PersonDto"];
+            note: string;
+            counts: components["schemas"]["CountsDto"];
+            /** @description the latest word on it */
+            approval?: components["schemas"]["ApprovalDto"];
+            /** @description SetDocument of the geometry library */
+            document: {
+                [key: string]: unknown;
+            };
+            fitSheet: components["schemas"]["FitSheetDto"];
+            /** @description newest first */
+            approvals: components["schemas"]["ApprovalDto"][];
+        };
+        ApproveRevisionDto: {
+            /** @enum {string} */
+            decision: "approved" | "changes-wanted";
+            comment?: string;
+        };
+        NoteDto: {
+            /** Format: uuid */
+            id: string;
+            /** @enum {string} */
+            kind: "comment" | "mark";
+            text: string;
+            pieceId?: string;
+            /** Format: date-time */
+            createdAt: string;
+            createdBy: components["schemas"]["PersonDto"];
+            resolved: boolean;
+            /** Format: date-time */
+            resolvedAt?: string;
+            resolvedBy?: components["schemas"]["PersonDto"];
+        };
+        NotePage: {
+            items: components["schemas"]["NoteDto"][];
+            total: number;
+            page: number;
+            pageSize: number;
+        };
+        CreateNoteDto: {
+            text: string;
+            /** @description piece the note is about */
+            pieceId?: string;
+            /** @enum {string} */
+            kind: "comment" | "mark";
+        };
+        ResolveNoteDto: {
+            resolved: boolean;
+        };
+        BuiltPartDto: {
+            partId: string;
+            /** Format: date-time */
+            builtAt: string;
+            builtBy: components["schemas"]["PersonDto"];
+        };
+        BuiltPartsDto: {
+            items: components["schemas"]["BuiltPartDto"][];
+        };
+        SetBuiltDto: {
+            /** @description id of a part of the draft or of the latest revision */
+            partId: string;
+            built: boolean;
+        };
+        UpholstererDto: {
+            /** Format: uuid */
+            id: string;
+            name: string;
+            contactName: string;
+            email: string;
+            telephone: string;
+            notes: string;
+            /** Format: date-time */
+            createdAt: string;
+        };
+        UpholstererPage: {
+            items: components["schemas"]["UpholstererDto"][];
+            total: number;
+            page: number;
+            pageSize: number;
+        };
+        CreateUpholstererDto: {
+            name: string;
+            contactName?: string;
+            /** Format: email */
+            email: string;
+            telephone?: string;
+            notes?: string;
+        };
+        UpdateUpholstererDto: {
+            name?: string;
+            contactName?: string;
+            /** Format: email */
+            email?: string;
+            telephone?: string;
+            notes?: string;
+        };
+        /** @enum {string} */
+        OrderState: "draft" | "sent" | "quoted" | "agreed" | "first-article" | "in-work" | "shipped" | "received" | "closed" | "cancelled";
+        OrderUpholstererDto: {
+            /** Format: uuid */
+            id: string;
+            name: string;
+            contactName: string;
+            /** @description no longer in the address book */
+            removed: boolean;
+        };
+        OrderSummaryDto: {
+            /** Format: uuid */
+            id: string;
+            /** @description counts through the workshop */
+            number: number;
+            title: string;
+            state: components["schemas"]["OrderState"];
+            /** Format: uuid */
+            setId: string;
+            setName: string;
+            revisionLetter: string;
+            /** Format: date */
+            neededBy: string | null;
+            cushionCount: number;
+            upholsterer: components["schemas"]["OrderUpholstererDto"] | null;
+            /** @description messages of the upholsterer that nobody has answered */
+            openQuestions: number;
+            /** Format: date-time */
+            updatedAt: string;
+        };
+        OrderSummaryPage: {
+            items: components["schemas"]["OrderSummaryDto"][];
+            total: number;
+            page: number;
+            pageSize: number;
+        };
+        OrderSpecInput: {
+            cover?: string;
+            /** @description beyond grade, density and firmness, which the set holds */
+            foam?: string;
+            welt?: string;
+            closure?: string;
+            fixing?: string;
+            buttons?: string;
+            notes?: string;
+            /** @description a requirement and its evidence: recorded, not certified */
+            flammability?: string;
+        };
+        CreateOrderDto: {
+            /** Format: uuid */
+            setId: string;
+            /** @description an issued revision, as "C" */
+            revisionLetter: string;
+            title: string;
+            /** Format: date */
+            neededBy?: string | null;
+            /** @description marks as C1; null: every cushion */
+            cushionMarks?: string[] | null;
+            spec?: components["schemas"]["OrderSpecInput"];
+        };
+        OrderSpecDto: {
+            cover: string;
+            foam: string;
+            welt: string;
+            closure: string;
+            fixing: string;
+            buttons: string;
+            notes: string;
+            flammability: string;
+        };
+        CushionPlaceDto: {
+            number: number;
+            of: number;
+        };
+        /** @enum {string} */
+        CushionHand: "left" | "right" | "either";
+        /** @enum {string} */
+        CushionEdgeMeets: "wall" | "end-wall" | "arm" | "neighbour" | "corner-cushion" | "free" | "back-pad" | "front" | "seat-cushion" | "top";
+        CushionEdgesDto: {
+            back: components["schemas"]["CushionEdgeMeets"];
+            front: components["schemas"]["CushionEdgeMeets"];
+            left: components["schemas"]["CushionEdgeMeets"];
+            right: components["schemas"]["CushionEdgeMeets"];
+        };
+        CushionSizeDto: {
+            widthMm: number;
+            depthMm: number;
+            thicknessMm: number;
+        };
+        CushionGapsDto: {
+            back: number;
+            front: number;
+            left: number;
+            right: number;
+        };
+        CushionFaceDto: {
+            widthMm: number;
+            depthMm: number;
+        };
+        CushionPlatesDto: {
+            widthMm: number;
+            depthMm: number;
+            /** @enum {number} */
+            count: 2;
+        };
+        CushionZipDto: {
+            edgeMm: number;
+            wrapMm: number;
+            lengthMm: number;
+        };
+        CushionZipPanelDto: {
+            /** @enum {number} */
+            count: 2;
+            halfWidthMm: number;
+            lengthMm: number;
+        };
+        CushionBoxingDto: {
+            finishedLengthMm: number;
+            cutLengthMm: number;
+            cutHeightMm: number;
+        };
+        CushionWeltDto: {
+            /** @enum {number} */
+            seams: 2;
+            alongSeamsMm: number;
+            joinsMm: number;
+            lengthMm: number;
+        };
+        CushionCutDto: {
+            foamMm: components["schemas"]["CushionSizeDto"];
+            foamVolumeM3: number;
+            foamMassKg: number;
+            boardMm: components["schemas"]["CushionFaceDto"];
+            plates: components["schemas"]["CushionPlatesDto"];
+            perimeterMm: number;
+            zip: components["schemas"]["CushionZipDto"];
+            zipPanel: components["schemas"]["CushionZipPanelDto"];
+            boxing: components["schemas"]["CushionBoxingDto"];
+            welt: components["schemas"]["CushionWeltDto"];
+        };
+        CushionFoamDto: {
+            grade: string;
+            densityKgM3: number;
+            ifd25N: number;
+            supportFactor: number;
+        };
+        ButtonColumnDto: {
+            fromSeamMm: number;
+            fromDatumMm: number;
+            offJointMm: number;
+        };
+        ButtonTableDto: {
+            columns: components["schemas"]["ButtonColumnDto"][];
+            rowsMm: number[];
+            count: number;
+            /** @enum {string} */
+            alignedTo: "joints" | "board-centres";
+        };
+        /** @enum {string} */
+        CushionDatumMeets: "wall" | "end-wall" | "arm" | "bench-end";
+        CushionDatumDto: {
+            /** @enum {string} */
+            side: "left" | "right";
+            meets: components["schemas"]["CushionDatumMeets"];
+            wallMark?: string;
+            toSeamMm: number;
+        };
+        CushionDto: {
+            mark: string;
+            key: string;
+            benchId: string;
+            benchMark: string;
+            /** @enum {string} */
+            kind: "seat" | "back";
+            place: components["schemas"]["CushionPlaceDto"];
+            hand: components["schemas"]["CushionHand"];
+            edges: components["schemas"]["CushionEdgesDto"];
+            placeMm: components["schemas"]["CushionSizeDto"];
+            gapsMm: components["schemas"]["CushionGapsDto"];
+            /** @description seam to seam */
+            finishedMm: components["schemas"]["CushionSizeDto"];
+            cut: components["schemas"]["CushionCutDto"];
+            /** @enum {string} */
+            zipEdge: "back" | "bottom";
+            foam: components["schemas"]["CushionFoamDto"];
+            buttons: components["schemas"]["ButtonTableDto"];
+            boardLinesMm: number[];
+            datum: components["schemas"]["CushionDatumDto"];
+        };
+        SentDto: {
+            revisionLetter: string;
+            /** Format: date-time */
+            at: string;
+            byName: string;
+            /** @description the order says something else now than what was sent */
+            changedSince: boolean;
+        };
+        AcknowledgementDto: {
+            name: string;
+            /** Format: date-time */
+            at: string;
+            revisionLetter: string;
+        };
+        /** @enum {string} */
+        OrderLinkState: "none" | "valid" | "expired" | "revoked";
+        OrderLinkDto: {
+            state: components["schemas"]["OrderLinkState"];
+            /** Format: date-time */
+            expiresAt: string | null;
+        };
+        /** @enum {string} */
+        MailState: "queued" | "sending" | "sent" | "failed" | "perhaps-sent";
+        OrderMailDto: {
+            /** Format: uuid */
+            id: string;
+            state: components["schemas"]["MailState"];
+            /** Format: date-time */
+            at: string;
+        };
+        /** @enum {string} */
+        RecordedOrderState: "quoted" | "agreed" | "first-article" | "in-work" | "shipped" | "received" | "closed" | "cancelled";
+        /** @enum {string} */
+        OrderEventKind: "created" | "sent" | "acknowledged" | "state" | "link-renewed" | "link-revoked";
+        /** @enum {string} */
+        OrderSide: "workshop" | "upholsterer";
+        OrderEventDto: {
+            kind: components["schemas"]["OrderEventKind"];
+            /** Format: date-time */
+            at: string;
+            side: components["schemas"]["OrderSide"];
+            byName: string;
+            /** @enum {string|null} */
+            fromState: "draft" | "sent" | "quoted" | "agreed" | "first-article" | "in-work" | "shipped" | "received" | "closed" | "cancelled" | null;
+            /** @enum {string|null} */
+            toState: "draft" | "sent" | "quoted" | "agreed" | "first-article" | "in-work" | "shipped" | "received" | "closed" | "cancelled" | null;
+            revisionLetter: string;
+            note: string;
+        };
+        OrderDto: {
+            /** Format: uuid */
+            id: string;
+            /** @description counts through the workshop */
+            number: number;
+            title: string;
+            state: components["schemas"]["OrderState"];
+            /** Format: uuid */
+            setId: string;
+            setName: string;
+            revisionLetter: string;
+            /** Format: date */
+            neededBy: string | null;
+            cushionCount: number;
+            upholsterer: components["schemas"]["OrderUpholstererDto"] | null;
+            /** @description messages of the upholsterer that nobody has answered */
+            openQuestions: number;
+            /** Format: date-time */
+            updatedAt: string;
+            /** Format: date-time */
+            revisionIssuedAt: string;
+            /** @description null: every cushion of the revision */
+            cushionMarks: string[] | null;
+            spec: components["schemas"]["OrderSpecDto"];
+            cushions: components["schemas"]["CushionDto"][];
+            sent: components["schemas"]["SentDto"] | null;
+            /** @description of what was last sent */
+            acknowledgement: components["schemas"]["AcknowledgementDto"] | null;
+            link: components["schemas"]["OrderLinkDto"];
+            /** @description the last mail about this order to the upholsterer */
+            lastMail: components["schemas"]["OrderMailDto"] | null;
+            nextStates: components["schemas"]["RecordedOrderState"][];
+            maySend: boolean;
+            mayChange: boolean;
+            events: components["schemas"]["OrderEventDto"][];
+            /** Format: date-time */
+            createdAt: string;
+        };
+        UpdateOrderDto: {
+            /** @description an issued revision, as "C" */
+            revisionLetter?: string;
+            title?: string;
+            /** Format: date */
+            neededBy?: string | null;
+            /** @description marks as C1; null: every cushion */
+            cushionMarks?: string[] | null;
+            spec?: components["schemas"]["OrderSpecInput"];
+        };
+        SendOrderDto: {
+            /** Format: uuid */
+            upholstererId: string;
+            message?: string;
+        };
+        CancelOrderDto: {
+            note?: string;
+        };
+        RecordStateDto: {
+            to: components["schemas"]["RecordedOrderState"];
+            /** @description how it is known: "by telephone, 2 February" */
+            note?: string;
+        };
+        OrderMessageDto: {
+            /** Format: uuid */
+            id: string;
+            side: components["schemas"]["OrderSide"];
+            authorName: string;
+            text: string;
+            /** Format: date-time */
+            at: string;
+        };
+        OrderMessagePage: {
+            items: components["schemas"]["OrderMessageDto"][];
+            total: number;
+            page: number;
+            pageSize: number;
+        };
+        WriteMessageDto: {
+            text: string;
+        };
+        PublicWorkshopDto: {
+            name: string;
+            telephone: string;
+            /** @description who sent the order */
+            contactName: string;
+        };
+        PublicMessageDto: {
+            side: components["schemas"]["OrderSide"];
+            authorName: string;
+            text: string;
+            /** Format: date-time */
+            at: string;
+        };
+        PublicOrderDto: {
+            workshop: components["schemas"]["PublicWorkshopDto"];
+            number: number;
+            title: string;
+            productionName: string;
+            setName: string;
+            /** @description the upholsterer the order is for */
+            upholstererName: string;
+            state: components["schemas"]["OrderState"];
+            revisionLetter: string;
+            /** Format: date-time */
+            revisionIssuedAt: string;
+            /** Format: date */
+            neededBy: string | null;
+            /** @enum {string} */
+            units: "feet-inches" | "decimal-inches" | "millimetres";
+            /** @enum {number} */
+            roundTo: 16 | 8;
+            /** Format: date-time */
+            sentAt: string;
+            spec: components["schemas"]["OrderSpecDto"];
+            cushions: components["schemas"]["CushionDto"][];
+            messages: components["schemas"]["PublicMessageDto"][];
+            acknowledgement: components["schemas"]["AcknowledgementDto"] | null;
+            /**
+             * Format: date-time
+             * @description when this link stops working
+             */
+            linkExpiresAt: string;
+        };
+        AcknowledgeDto: {
+            /** @description the name of whoever agrees, typed */
+            name: string;
         };
         ProblemBody: {
             type: string;
@@ -1601,6 +3449,1980 @@ export interface operations {
                 };
                 content: {
                     "application/json": components["schemas"]["SessionDto"];
+                };
+            };
+            /** @description what went wrong (RFC 9457) */
+            default: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemBody"];
+                };
+            };
+        };
+    };
+    Productions_list: {
+        parameters: {
+            query?: {
+                page?: unknown;
+                pageSize?: unknown;
+                sort?: string;
+                order?: "asc" | "desc";
+                search?: string;
+                status?: "active" | "archived";
+            };
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        requestBody?: never;
+        responses: {
+            200: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["ProductionPage"];
+                };
+            };
+            /** @description what went wrong (RFC 9457) */
+            default: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemBody"];
+                };
+            };
+        };
+    };
+    Productions_create: {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        requestBody: {
+            content: {
+                "application/json": components["schemas"]["CreateProductionDto"];
+            };
+        };
+        responses: {
+            201: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["ProductionDto"];
+                };
+            };
+            /** @description what went wrong (RFC 9457) */
+            default: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemBody"];
+                };
+            };
+        };
+    };
+    Productions_get: {
+        parameters: {
+            query?: never;
+            header?: never;
+            path: {
+                productionId: string;
+            };
+            cookie?: never;
+        };
+        requestBody?: never;
+        responses: {
+            200: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["ProductionDto"];
+                };
+            };
+            /** @description what went wrong (RFC 9457) */
+            default: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemBody"];
+                };
+            };
+        };
+    };
+    Productions_patch: {
+        parameters: {
+            query?: never;
+            header?: never;
+            path: {
+                productionId: string;
+            };
+            cookie?: never;
+        };
+        requestBody: {
+            content: {
+                "application/json": components["schemas"]["PatchProductionDto"];
+            };
+        };
+        responses: {
+            200: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["ProductionDto"];
+                };
+            };
+            /** @description what went wrong (RFC 9457) */
+            default: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemBody"];
+                };
+            };
+        };
+    };
+    Productions_archive: {
+        parameters: {
+            query?: never;
+            header?: never;
+            path: {
+                productionId: string;
+            };
+            cookie?: never;
+        };
+        requestBody?: never;
+        responses: {
+            200: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["ProductionDto"];
+                };
+            };
+            /** @description what went wrong (RFC 9457) */
+            default: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemBody"];
+                };
+            };
+        };
+    };
+    Productions_restore: {
+        parameters: {
+            query?: never;
+            header?: never;
+            path: {
+                productionId: string;
+            };
+            cookie?: never;
+        };
+        requestBody?: never;
+        responses: {
+            200: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["ProductionDto"];
+                };
+            };
+            /** @description what went wrong (RFC 9457) */
+            default: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemBody"];
+                };
+            };
+        };
+    };
+    Cast_list: {
+        parameters: {
+            query?: {
+                page?: unknown;
+                pageSize?: unknown;
+                sort?: string;
+                order?: "asc" | "desc";
+                search?: string;
+            };
+            header?: never;
+            path: {
+                productionId: string;
+            };
+            cookie?: never;
+        };
+        requestBody?: never;
+        responses: {
+            200: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["CastPageDto"];
+                };
+            };
+            /** @description what went wrong (RFC 9457) */
+            default: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemBody"];
+                };
+            };
+        };
+    };
+    Cast_create: {
+        parameters: {
+            query?: never;
+            header?: never;
+            path: {
+                productionId: string;
+            };
+            cookie?: never;
+        };
+        requestBody: {
+            content: {
+                "application/json": components["schemas"]["CreateCastMemberDto"];
+            };
+        };
+        responses: {
+            201: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["CastMemberDto"];
+                };
+            };
+            /** @description what went wrong (RFC 9457) */
+            default: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemBody"];
+                };
+            };
+        };
+    };
+    Cast_preview: {
+        parameters: {
+            query?: never;
+            header?: never;
+            path: {
+                productionId: string;
+            };
+            cookie?: never;
+        };
+        requestBody: {
+            content: {
+                "application/json": components["schemas"]["ImportCastDto"];
+            };
+        };
+        responses: {
+            200: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["CastImportPreviewDto"];
+                };
+            };
+            /** @description what went wrong (RFC 9457) */
+            default: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemBody"];
+                };
+            };
+        };
+    };
+    Cast_import: {
+        parameters: {
+            query?: never;
+            header?: never;
+            path: {
+                productionId: string;
+            };
+            cookie?: never;
+        };
+        requestBody: {
+            content: {
+                "application/json": components["schemas"]["ImportCastDto"];
+            };
+        };
+        responses: {
+            200: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["CastImportDto"];
+                };
+            };
+            /** @description what went wrong (RFC 9457) */
+            default: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemBody"];
+                };
+            };
+        };
+    };
+    CastErasure_erase: {
+        parameters: {
+            query?: never;
+            header?: never;
+            path: {
+                productionId: string;
+                castId: string;
+            };
+            cookie?: never;
+        };
+        requestBody?: never;
+        responses: {
+            /** @description the person is gone from cast, drafts and issued sheets */
+            204: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content?: never;
+            };
+            /** @description what went wrong (RFC 9457) */
+            default: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemBody"];
+                };
+            };
+        };
+    };
+    Cast_patch: {
+        parameters: {
+            query?: never;
+            header?: never;
+            path: {
+                productionId: string;
+                castId: string;
+            };
+            cookie?: never;
+        };
+        requestBody: {
+            content: {
+                "application/json": components["schemas"]["PatchCastMemberDto"];
+            };
+        };
+        responses: {
+            200: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["CastMemberDto"];
+                };
+            };
+            /** @description what went wrong (RFC 9457) */
+            default: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemBody"];
+                };
+            };
+        };
+    };
+    CastFiles_csv: {
+        parameters: {
+            query?: never;
+            header?: never;
+            path: {
+                productionId: string;
+            };
+            cookie?: never;
+        };
+        requestBody?: never;
+        responses: {
+            200: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "text/csv": string;
+                };
+            };
+            /** @description what went wrong (RFC 9457) */
+            default: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemBody"];
+                };
+            };
+        };
+    };
+    CastFiles_export: {
+        parameters: {
+            query?: never;
+            header?: never;
+            path: {
+                productionId: string;
+                castId: string;
+            };
+            cookie?: never;
+        };
+        requestBody?: never;
+        responses: {
+            /** @description all that is held about one person */
+            200: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["CastMemberDto"];
+                };
+            };
+            /** @description what went wrong (RFC 9457) */
+            default: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemBody"];
+                };
+            };
+        };
+    };
+    Sets_list: {
+        parameters: {
+            query?: {
+                page?: unknown;
+                pageSize?: unknown;
+                sort?: string;
+                order?: "asc" | "desc";
+                search?: string;
+                status?: "active" | "archived";
+            };
+            header?: never;
+            path: {
+                productionId: string;
+            };
+            cookie?: never;
+        };
+        requestBody?: never;
+        responses: {
+            200: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["SetPage"];
+                };
+            };
+            /** @description what went wrong (RFC 9457) */
+            default: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemBody"];
+                };
+            };
+        };
+    };
+    Sets_create: {
+        parameters: {
+            query?: never;
+            header?: never;
+            path: {
+                productionId: string;
+            };
+            cookie?: never;
+        };
+        requestBody: {
+            content: {
+                "application/json": components["schemas"]["CreateSetDto"];
+            };
+        };
+        responses: {
+            201: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["SetDto"];
+                };
+            };
+            /** @description what went wrong (RFC 9457) */
+            default: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemBody"];
+                };
+            };
+        };
+    };
+    Sets_get: {
+        parameters: {
+            query?: never;
+            header?: never;
+            path: {
+                productionId: string;
+                setId: string;
+            };
+            cookie?: never;
+        };
+        requestBody?: never;
+        responses: {
+            200: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["SetDto"];
+                };
+            };
+            /** @description what went wrong (RFC 9457) */
+            default: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemBody"];
+                };
+            };
+        };
+    };
+    Sets_rename: {
+        parameters: {
+            query?: never;
+            header?: never;
+            path: {
+                productionId: string;
+                setId: string;
+            };
+            cookie?: never;
+        };
+        requestBody: {
+            content: {
+                "application/json": components["schemas"]["RenameSetDto"];
+            };
+        };
+        responses: {
+            200: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["SetDto"];
+                };
+            };
+            /** @description what went wrong (RFC 9457) */
+            default: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemBody"];
+                };
+            };
+        };
+    };
+    Sets_duplicate: {
+        parameters: {
+            query?: never;
+            header?: never;
+            path: {
+                productionId: string;
+                setId: string;
+            };
+            cookie?: never;
+        };
+        requestBody?: never;
+        responses: {
+            201: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["SetDto"];
+                };
+            };
+            /** @description what went wrong (RFC 9457) */
+            default: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemBody"];
+                };
+            };
+        };
+    };
+    Sets_archive: {
+        parameters: {
+            query?: never;
+            header?: never;
+            path: {
+                productionId: string;
+                setId: string;
+            };
+            cookie?: never;
+        };
+        requestBody?: never;
+        responses: {
+            200: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["SetDto"];
+                };
+            };
+            /** @description what went wrong (RFC 9457) */
+            default: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemBody"];
+                };
+            };
+        };
+    };
+    Sets_restore: {
+        parameters: {
+            query?: never;
+            header?: never;
+            path: {
+                productionId: string;
+                setId: string;
+            };
+            cookie?: never;
+        };
+        requestBody?: never;
+        responses: {
+            200: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["SetDto"];
+                };
+            };
+            /** @description what went wrong (RFC 9457) */
+            default: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemBody"];
+                };
+            };
+        };
+    };
+    Drafts_get: {
+        parameters: {
+            query?: never;
+            header?: never;
+            path: {
+                productionId: string;
+                setId: string;
+            };
+            cookie?: never;
+        };
+        requestBody?: never;
+        responses: {
+            200: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["DraftDto"];
+                };
+            };
+            /** @description what went wrong (RFC 9457) */
+            default: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemBody"];
+                };
+            };
+        };
+    };
+    Drafts_save: {
+        parameters: {
+            query?: never;
+            header?: never;
+            path: {
+                productionId: string;
+                setId: string;
+            };
+            cookie?: never;
+        };
+        requestBody: {
+            content: {
+                "application/json": components["schemas"]["SaveDraftDto"];
+            };
+        };
+        responses: {
+            200: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["SavedDraftDto"];
+                };
+            };
+            /** @description somebody saved meanwhile */
+            409: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["DraftConflictDto"];
+                };
+            };
+            /** @description what went wrong (RFC 9457) */
+            default: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemBody"];
+                };
+            };
+        };
+    };
+    Drafts_fitSheet: {
+        parameters: {
+            query?: never;
+            header?: never;
+            path: {
+                productionId: string;
+                setId: string;
+            };
+            cookie?: never;
+        };
+        requestBody?: never;
+        responses: {
+            200: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["FitSheetDto"];
+                };
+            };
+            /** @description what went wrong (RFC 9457) */
+            default: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemBody"];
+                };
+            };
+        };
+    };
+    Revisions_list: {
+        parameters: {
+            query?: {
+                page?: unknown;
+                pageSize?: unknown;
+                sort?: string;
+                order?: "asc" | "desc";
+                search?: string;
+            };
+            header?: never;
+            path: {
+                productionId: string;
+                setId: string;
+            };
+            cookie?: never;
+        };
+        requestBody?: never;
+        responses: {
+            200: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["RevisionPage"];
+                };
+            };
+            /** @description what went wrong (RFC 9457) */
+            default: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemBody"];
+                };
+            };
+        };
+    };
+    Revisions_issue: {
+        parameters: {
+            query?: never;
+            header?: never;
+            path: {
+                productionId: string;
+                setId: string;
+            };
+            cookie?: never;
+        };
+        requestBody: {
+            content: {
+                "application/json": components["schemas"]["IssueRevisionDto"];
+            };
+        };
+        responses: {
+            201: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["RevisionDto"];
+                };
+            };
+            /** @description what went wrong (RFC 9457) */
+            default: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemBody"];
+                };
+            };
+        };
+    };
+    Revisions_get: {
+        parameters: {
+            query?: never;
+            header?: never;
+            path: {
+                productionId: string;
+                setId: string;
+                letter: string;
+            };
+            cookie?: never;
+        };
+        requestBody?: never;
+        responses: {
+            200: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["RevisionDetailDto"];
+                };
+            };
+            /** @description what went wrong (RFC 9457) */
+            default: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemBody"];
+                };
+            };
+        };
+    };
+    Revisions_approve: {
+        parameters: {
+            query?: never;
+            header?: never;
+            path: {
+                productionId: string;
+                setId: string;
+                letter: string;
+            };
+            cookie?: never;
+        };
+        requestBody: {
+            content: {
+                "application/json": components["schemas"]["ApproveRevisionDto"];
+            };
+        };
+        responses: {
+            200: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["RevisionDetailDto"];
+                };
+            };
+            /** @description what went wrong (RFC 9457) */
+            default: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemBody"];
+                };
+            };
+        };
+    };
+    FitSheetFiles_draftCsv: {
+        parameters: {
+            query?: never;
+            header?: never;
+            path: {
+                productionId: string;
+                setId: string;
+            };
+            cookie?: never;
+        };
+        requestBody?: never;
+        responses: {
+            200: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "text/csv": string;
+                };
+            };
+            /** @description what went wrong (RFC 9457) */
+            default: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemBody"];
+                };
+            };
+        };
+    };
+    FitSheetFiles_draftPdf: {
+        parameters: {
+            query?: never;
+            header?: never;
+            path: {
+                productionId: string;
+                setId: string;
+            };
+            cookie?: never;
+        };
+        requestBody?: never;
+        responses: {
+            200: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/pdf": string;
+                };
+            };
+            /** @description what went wrong (RFC 9457) */
+            default: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemBody"];
+                };
+            };
+        };
+    };
+    FitSheetFiles_revisionCsv: {
+        parameters: {
+            query?: never;
+            header?: never;
+            path: {
+                productionId: string;
+                setId: string;
+                letter: string;
+            };
+            cookie?: never;
+        };
+        requestBody?: never;
+        responses: {
+            200: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "text/csv": string;
+                };
+            };
+            /** @description what went wrong (RFC 9457) */
+            default: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemBody"];
+                };
+            };
+        };
+    };
+    FitSheetFiles_revisionPdf: {
+        parameters: {
+            query?: never;
+            header?: never;
+            path: {
+                productionId: string;
+                setId: string;
+                letter: string;
+            };
+            cookie?: never;
+        };
+        requestBody?: never;
+        responses: {
+            200: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/pdf": string;
+                };
+            };
+            /** @description what went wrong (RFC 9457) */
+            default: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemBody"];
+                };
+            };
+        };
+    };
+    Notes_list: {
+        parameters: {
+            query?: {
+                page?: unknown;
+                pageSize?: unknown;
+                sort?: string;
+                order?: "asc" | "desc";
+                search?: string;
+            };
+            header?: never;
+            path: {
+                productionId: string;
+                setId: string;
+            };
+            cookie?: never;
+        };
+        requestBody?: never;
+        responses: {
+            200: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["NotePage"];
+                };
+            };
+            /** @description what went wrong (RFC 9457) */
+            default: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemBody"];
+                };
+            };
+        };
+    };
+    Notes_create: {
+        parameters: {
+            query?: never;
+            header?: never;
+            path: {
+                productionId: string;
+                setId: string;
+            };
+            cookie?: never;
+        };
+        requestBody: {
+            content: {
+                "application/json": components["schemas"]["CreateNoteDto"];
+            };
+        };
+        responses: {
+            201: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["NoteDto"];
+                };
+            };
+            /** @description what went wrong (RFC 9457) */
+            default: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemBody"];
+                };
+            };
+        };
+    };
+    Notes_resolve: {
+        parameters: {
+            query?: never;
+            header?: never;
+            path: {
+                productionId: string;
+                setId: string;
+                noteId: string;
+            };
+            cookie?: never;
+        };
+        requestBody: {
+            content: {
+                "application/json": components["schemas"]["ResolveNoteDto"];
+            };
+        };
+        responses: {
+            200: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["NoteDto"];
+                };
+            };
+            /** @description what went wrong (RFC 9457) */
+            default: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemBody"];
+                };
+            };
+        };
+    };
+    BuiltParts_list: {
+        parameters: {
+            query?: never;
+            header?: never;
+            path: {
+                productionId: string;
+                setId: string;
+            };
+            cookie?: never;
+        };
+        requestBody?: never;
+        responses: {
+            200: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["BuiltPartsDto"];
+                };
+            };
+            /** @description what went wrong (RFC 9457) */
+            default: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemBody"];
+                };
+            };
+        };
+    };
+    BuiltParts_tick: {
+        parameters: {
+            query?: never;
+            header?: never;
+            path: {
+                productionId: string;
+                setId: string;
+            };
+            cookie?: never;
+        };
+        requestBody: {
+            content: {
+                "application/json": components["schemas"]["SetBuiltDto"];
+            };
+        };
+        responses: {
+            200: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["BuiltPartsDto"];
+                };
+            };
+            /** @description what went wrong (RFC 9457) */
+            default: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemBody"];
+                };
+            };
+        };
+    };
+    Upholsterers_list: {
+        parameters: {
+            query?: {
+                page?: unknown;
+                pageSize?: unknown;
+                sort?: string;
+                order?: "asc" | "desc";
+                search?: string;
+            };
+            header?: never;
+            path: {
+                workshopId: unknown;
+            };
+            cookie?: never;
+        };
+        requestBody?: never;
+        responses: {
+            200: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["UpholstererPage"];
+                };
+            };
+            /** @description what went wrong (RFC 9457) */
+            default: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemBody"];
+                };
+            };
+        };
+    };
+    Upholsterers_create: {
+        parameters: {
+            query?: never;
+            header?: never;
+            path: {
+                workshopId: unknown;
+            };
+            cookie?: never;
+        };
+        requestBody: {
+            content: {
+                "application/json": components["schemas"]["CreateUpholstererDto"];
+            };
+        };
+        responses: {
+            201: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["UpholstererDto"];
+                };
+            };
+            /** @description what went wrong (RFC 9457) */
+            default: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemBody"];
+                };
+            };
+        };
+    };
+    Upholsterers_remove: {
+        parameters: {
+            query?: never;
+            header?: never;
+            path: {
+                upholstererId: string;
+                workshopId: unknown;
+            };
+            cookie?: never;
+        };
+        requestBody?: never;
+        responses: {
+            204: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content?: never;
+            };
+            /** @description what went wrong (RFC 9457) */
+            default: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemBody"];
+                };
+            };
+        };
+    };
+    Upholsterers_update: {
+        parameters: {
+            query?: never;
+            header?: never;
+            path: {
+                upholstererId: string;
+                workshopId: unknown;
+            };
+            cookie?: never;
+        };
+        requestBody: {
+            content: {
+                "application/json": components["schemas"]["UpdateUpholstererDto"];
+            };
+        };
+        responses: {
+            200: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["UpholstererDto"];
+                };
+            };
+            /** @description what went wrong (RFC 9457) */
+            default: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemBody"];
+                };
+            };
+        };
+    };
+    Orders_list: {
+        parameters: {
+            query?: {
+                page?: unknown;
+                pageSize?: unknown;
+                sort?: string;
+                order?: "asc" | "desc";
+                search?: string;
+            };
+            header?: never;
+            path: {
+                productionId: string;
+                workshopId: unknown;
+            };
+            cookie?: never;
+        };
+        requestBody?: never;
+        responses: {
+            200: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["OrderSummaryPage"];
+                };
+            };
+            /** @description what went wrong (RFC 9457) */
+            default: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemBody"];
+                };
+            };
+        };
+    };
+    Orders_create: {
+        parameters: {
+            query?: never;
+            header?: never;
+            path: {
+                productionId: string;
+                workshopId: unknown;
+            };
+            cookie?: never;
+        };
+        requestBody: {
+            content: {
+                "application/json": components["schemas"]["CreateOrderDto"];
+            };
+        };
+        responses: {
+            201: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["OrderDto"];
+                };
+            };
+            /** @description what went wrong (RFC 9457) */
+            default: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemBody"];
+                };
+            };
+        };
+    };
+    Orders_get: {
+        parameters: {
+            query?: never;
+            header?: never;
+            path: {
+                productionId: string;
+                orderId: string;
+                workshopId: unknown;
+            };
+            cookie?: never;
+        };
+        requestBody?: never;
+        responses: {
+            200: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["OrderDto"];
+                };
+            };
+            /** @description what went wrong (RFC 9457) */
+            default: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemBody"];
+                };
+            };
+        };
+    };
+    Orders_update: {
+        parameters: {
+            query?: never;
+            header?: never;
+            path: {
+                productionId: string;
+                orderId: string;
+                workshopId: unknown;
+            };
+            cookie?: never;
+        };
+        requestBody: {
+            content: {
+                "application/json": components["schemas"]["UpdateOrderDto"];
+            };
+        };
+        responses: {
+            200: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["OrderDto"];
+                };
+            };
+            /** @description what went wrong (RFC 9457) */
+            default: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemBody"];
+                };
+            };
+        };
+    };
+    Orders_specPdf: {
+        parameters: {
+            query?: never;
+            header?: never;
+            path: {
+                productionId: string;
+                orderId: string;
+                workshopId: unknown;
+            };
+            cookie?: never;
+        };
+        requestBody?: never;
+        responses: {
+            200: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/pdf": string;
+                };
+            };
+            /** @description what went wrong (RFC 9457) */
+            default: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemBody"];
+                };
+            };
+        };
+    };
+    Orders_send: {
+        parameters: {
+            query?: never;
+            header?: never;
+            path: {
+                productionId: string;
+                orderId: string;
+                workshopId: unknown;
+            };
+            cookie?: never;
+        };
+        requestBody: {
+            content: {
+                "application/json": components["schemas"]["SendOrderDto"];
+            };
+        };
+        responses: {
+            200: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["OrderDto"];
+                };
+            };
+            /** @description what went wrong (RFC 9457) */
+            default: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemBody"];
+                };
+            };
+        };
+    };
+    Orders_cancel: {
+        parameters: {
+            query?: never;
+            header?: never;
+            path: {
+                productionId: string;
+                orderId: string;
+                workshopId: unknown;
+            };
+            cookie?: never;
+        };
+        requestBody: {
+            content: {
+                "application/json": components["schemas"]["CancelOrderDto"];
+            };
+        };
+        responses: {
+            200: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["OrderDto"];
+                };
+            };
+            /** @description what went wrong (RFC 9457) */
+            default: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemBody"];
+                };
+            };
+        };
+    };
+    Orders_recordState: {
+        parameters: {
+            query?: never;
+            header?: never;
+            path: {
+                productionId: string;
+                orderId: string;
+                workshopId: unknown;
+            };
+            cookie?: never;
+        };
+        requestBody: {
+            content: {
+                "application/json": components["schemas"]["RecordStateDto"];
+            };
+        };
+        responses: {
+            200: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["OrderDto"];
+                };
+            };
+            /** @description what went wrong (RFC 9457) */
+            default: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemBody"];
+                };
+            };
+        };
+    };
+    Orders_messages: {
+        parameters: {
+            query?: {
+                page?: unknown;
+                pageSize?: unknown;
+                sort?: string;
+                order?: "asc" | "desc";
+                search?: string;
+            };
+            header?: never;
+            path: {
+                productionId: string;
+                orderId: string;
+                workshopId: unknown;
+            };
+            cookie?: never;
+        };
+        requestBody?: never;
+        responses: {
+            200: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["OrderMessagePage"];
+                };
+            };
+            /** @description what went wrong (RFC 9457) */
+            default: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemBody"];
+                };
+            };
+        };
+    };
+    Orders_write: {
+        parameters: {
+            query?: never;
+            header?: never;
+            path: {
+                productionId: string;
+                orderId: string;
+                workshopId: unknown;
+            };
+            cookie?: never;
+        };
+        requestBody: {
+            content: {
+                "application/json": components["schemas"]["WriteMessageDto"];
+            };
+        };
+        responses: {
+            201: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["OrderMessageDto"];
+                };
+            };
+            /** @description what went wrong (RFC 9457) */
+            default: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemBody"];
+                };
+            };
+        };
+    };
+    Orders_sendMailAgain: {
+        parameters: {
+            query?: never;
+            header?: never;
+            path: {
+                productionId: string;
+                orderId: string;
+                workshopId: unknown;
+            };
+            cookie?: never;
+        };
+        requestBody?: never;
+        responses: {
+            200: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["OrderDto"];
+                };
+            };
+            /** @description what went wrong (RFC 9457) */
+            default: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemBody"];
+                };
+            };
+        };
+    };
+    Orders_revokeLink: {
+        parameters: {
+            query?: never;
+            header?: never;
+            path: {
+                productionId: string;
+                orderId: string;
+                workshopId: unknown;
+            };
+            cookie?: never;
+        };
+        requestBody?: never;
+        responses: {
+            200: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["OrderDto"];
+                };
+            };
+            /** @description what went wrong (RFC 9457) */
+            default: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemBody"];
+                };
+            };
+        };
+    };
+    Orders_renewLink: {
+        parameters: {
+            query?: never;
+            header?: never;
+            path: {
+                productionId: string;
+                orderId: string;
+                workshopId: unknown;
+            };
+            cookie?: never;
+        };
+        requestBody?: never;
+        responses: {
+            200: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["OrderDto"];
+                };
+            };
+            /** @description what went wrong (RFC 9457) */
+            default: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemBody"];
+                };
+            };
+        };
+    };
+    Link_read: {
+        parameters: {
+            query?: never;
+            header?: never;
+            path: {
+                token: string;
+            };
+            cookie?: never;
+        };
+        requestBody?: never;
+        responses: {
+            200: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["PublicOrderDto"];
+                };
+            };
+            /** @description what went wrong (RFC 9457) */
+            default: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemBody"];
+                };
+            };
+        };
+    };
+    Link_specPdf: {
+        parameters: {
+            query?: never;
+            header?: never;
+            path: {
+                token: string;
+            };
+            cookie?: never;
+        };
+        requestBody?: never;
+        responses: {
+            200: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/pdf": string;
+                };
+            };
+            /** @description what went wrong (RFC 9457) */
+            default: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemBody"];
+                };
+            };
+        };
+    };
+    Link_acknowledge: {
+        parameters: {
+            query?: never;
+            header?: never;
+            path: {
+                token: string;
+            };
+            cookie?: never;
+        };
+        requestBody: {
+            content: {
+                "application/json": components["schemas"]["AcknowledgeDto"];
+            };
+        };
+        responses: {
+            200: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["PublicOrderDto"];
+                };
+            };
+            /** @description what went wrong (RFC 9457) */
+            default: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemBody"];
+                };
+            };
+        };
+    };
+    Link_reply: {
+        parameters: {
+            query?: never;
+            header?: never;
+            path: {
+                token: string;
+            };
+            cookie?: never;
+        };
+        requestBody: {
+            content: {
+                "application/json": components["schemas"]["WriteMessageDto"];
+            };
+        };
+        responses: {
+            200: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["PublicOrderDto"];
+                };
+            };
+            /** @description what went wrong (RFC 9457) */
+            default: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemBody"];
+                };
+            };
+        };
+    };
+    ProductionDuplication_duplicate: {
+        parameters: {
+            query?: never;
+            header?: never;
+            path: {
+                productionId: string;
+            };
+            cookie?: never;
+        };
+        requestBody?: never;
+        responses: {
+            201: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["ProductionDto"];
                 };
             };
             /** @description what went wrong (RFC 9457) */
