@@ -8,6 +8,7 @@ import { CastModule } from './cast/cast.module';
 import { CastErasureModule } from './cast/erasure/cast-erasure.module';
 import { logParameters } from './common/request-log';
 import { settings } from './config/settings';
+import { CushionOrdersModule } from './cushion-orders/cushion-orders.module';
 import { DatabaseModule } from './database/database.module';
 import { HealthModule } from './health/health.module';
 import { InvitationsModule } from './invitations/invitations.module';
@@ -41,6 +42,7 @@ import { WorkshopsModule } from './workshops/workshops.module';
     CastModule,
     SetsModule,
     UpholsterersModule,
+    CushionOrdersModule,
     CastErasureModule,
     ProductionDuplicationModule,
   ],

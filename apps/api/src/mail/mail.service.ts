@@ -52,7 +52,11 @@ export class MailService {
   }
 
   /** The last mail about something, for whoever asks whether it went out. */
-  async latestAbout(manager: EntityManager, relatedId: string, kinds: readonly string[]): Promise<OutboxMail | null> {
+  async latestAbout(
+    manager: EntityManager,
+    relatedId: string,
+    kinds: readonly string[],
+  ): Promise<OutboxMail | null> {
     return manager.findOne(OutboxMail, {
       where: { relatedId, kind: In([...kinds]) },
       order: { queuedAt: 'DESC', id: 'DESC' },

@@ -18,11 +18,11 @@ export function drawButtonTable(
   { units }: SpecPack,
   box: { x: number; y: number; width: number; floor: number },
 ): number {
-  const { columnsMm, rowsMm, wall, datumName } = cushion.buttons;
+  const { columnsMm, rowsMm, datum, seamName } = cushion.buttons;
   if (columnsMm.length === 0 || rowsMm.length === 0) return box.y;
   const step = lengthStep(units);
   const show = (mm: number) => bareLength(Math.round(mm / step) * step, units);
-  sheet.text(`Buttons, from the ${datumName} seam`, box.x, box.y + 4.4, { size: 10, weight: 600 });
+  sheet.text(`Buttons, from the ${seamName} seam`, box.x, box.y + 4.4, { size: 10, weight: 600 });
   let y = box.y + 5.8;
   const perBlock = Math.max(1, Math.floor((box.width - LABEL_MM) / 11.5));
   let shown = 0;
@@ -38,10 +38,8 @@ export function drawButtonTable(
     ];
     y = drawHead(sheet, grid, { x: box.x, y });
     y = drawRow(sheet, grid, ['from own seam', ...some.map(show)], { x: box.x, y }, { weight: 600 });
-    if (wall) {
-      const fromWall = wall.columnsMm.slice(shown, shown + perBlock).map(show);
-      y = drawRow(sheet, grid, ['from the wall', ...fromWall], { x: box.x, y });
-    }
+    const fromDatum = datum.columnsMm.slice(shown, shown + perBlock).map(show);
+    y = drawRow(sheet, grid, [`from ${datum.name}`, ...fromDatum], { x: box.x, y });
     shown += some.length;
   }
   if (shown < columnsMm.length) {

@@ -1,4 +1,4 @@
-import { drawChain } from './dimension-chain';
+import { type Chain, chainDepth, drawChain } from './dimension-chain';
 import { PEN, type Sheet } from './sheet';
 
 /** A cushion laid flat, in real millimetres. Page left and right, since the paper is read that way. */
@@ -14,7 +14,7 @@ export interface CushionPlan {
   /** Board joints under the cushion, measured like the columns. */
   boardLinesMm: readonly number[];
   wall: { side: 'left' | 'right'; gapMm: number; columnsMm: readonly number[]; name: string } | null;
-  zip: { lengthMm: number; wrapMm: number; words: string } | null;
+  zip: { edge: 'back' | 'front'; wrapMm: number; words: string };
   edges: { back: string; front: string; left: string; right: string };
 }
 
@@ -29,8 +29,22 @@ export interface PlanPlace {
   stepMm: number;
 }
 
-/** Paper that the chains and the wall need around the cushion itself. */
-export const PLAN_SPACE = { left: 20, right: 17, bottom: 11 } as const;
+/** Paper that the upright chains, the wall and the lower chain need around the cushion itself. */
+export const PLAN_SPACE = { chains: 20, wall: 17, bottom: 11 } as const;
+
+const FIRST_CHAIN_MM = 4.6;
+const WALL_CHAIN_MM = 6.6;
+
+/** The side that the upright chains stand on: away from the wall. */
+export function chainSide(plan: Pick<CushionPlan, 'wall'>): 'left' | 'right' {
+  return plan.wall?.side === 'left' ? 'right' : 'left';
+}
+
+/** Paper that the chains above the cushion need. */
+export function spaceAbove(sheet: Sheet, plan: CushionPlan, place: PlanPlace): number {
+  if (plan.columnsMm.length === 0) return 4;
+  return FIRST_CHAIN_MM + chainDepth(sheet, columnChain(plan, place)) + (plan.wall ? WALL_CHAIN_MM + 3 : 1);
+}
 
 export function drawCushionPlan(sheet: Sheet, plan: CushionPlan, place: PlanPlace): void {
   const width = plan.widthMm * place.factor;
@@ -42,7 +56,7 @@ export function drawCushionPlan(sheet: Sheet, plan: CushionPlan, place: PlanPlac
   sheet.rect(x, y, width, depth, { pen: PEN.edge });
   sheet.rect(x + 0.9, y + 0.9, width - 1.8, depth - 1.8, { pen: PEN.hair });
   drawWall(sheet, plan, { x, y, width, depth, place });
-  drawZip(sheet, plan, { x, y, width, factor: place.factor });
+  drawZip(sheet, plan, { x, y, width, depth, factor: place.factor });
   for (const column of plan.columnsMm) {
     for (const row of plan.rowsMm) drawButton(sheet, across(column), y + row * place.factor);
   }
@@ -79,26 +93,20 @@ function drawButton(sheet: Sheet, x: number, y: number): void {
 function drawZip(
   sheet: Sheet,
   plan: CushionPlan,
-  at: { x: number; y: number; width: number; factor: number },
+  at: { x: number; y: number; width: number; depth: number; factor: number },
 ): void {
-  if (!plan.zip) return;
-  const { x, y, width, factor } = at;
-  const wrap = plan.zip.wrapMm * factor;
-  const inset = wrap < 0 ? -wrap : 0;
-  const heavy = { pen: PEN.cut };
-  sheet.line(x + inset, y, x + width - inset, y, heavy);
-  if (wrap > 0) {
-    for (const side of [x, x + width]) {
-      sheet.line(side, y, side, y + wrap, heavy);
-      sheet.line(side - 1.6, y + wrap, side + 1.6, y + wrap, { pen: PEN.edge });
-    }
-    if (wrap > 7 && width > 60) {
-      sheet.flag('zip end', x + 3, y + wrap + 1.1);
-      sheet.flag('zip end', x + width - 3, y + wrap + 1.1, { align: 'right' });
-    }
-  } else {
-    for (const end of [x + inset, x + width - inset])
-      sheet.line(end, y - 1.6, end, y + 1.6, { pen: PEN.edge });
+  const { x, width } = at;
+  const inwards = plan.zip.edge === 'back' ? 1 : -1;
+  const edge = plan.zip.edge === 'back' ? at.y : at.y + at.depth;
+  const end = edge + inwards * plan.zip.wrapMm * at.factor;
+  sheet.line(x, edge, x + width, edge, { pen: PEN.cut });
+  for (const side of [x, x + width]) {
+    sheet.line(side, edge, side, end, { pen: PEN.cut });
+    sheet.line(side - 1.6, end, side + 1.6, end, { pen: PEN.edge });
+  }
+  if (Math.abs(end - edge) > 7 && width > 60) {
+    sheet.flag('zip end', x + 3, end + 1.1);
+    sheet.flag('zip end', x + width - 3, end + 1.1, { align: 'right' });
   }
 }
 
@@ -112,8 +120,9 @@ function drawWall(
   const right = plan.wall.side === 'right';
   const gap = plan.wall.gapMm * place.factor;
   const wallX = right ? x + width + gap : x - gap;
-  sheet.line(wallX, y - 11, wallX, y + depth + 2.5, { pen: 0.5 });
-  sheet.hatchBeside(wallX, y - 11, y + depth + 2.5, right ? 1 : -1);
+  const top = y - spaceAbove(sheet, plan, place) + 4;
+  sheet.line(wallX, top, wallX, y + depth + 2.5, { pen: 0.5 });
+  sheet.hatchBeside(wallX, top, y + depth + 2.5, right ? 1 : -1);
   uprightWords(sheet, plan.wall.name, wallX + (right ? 4.6 : -3.4), y, depth);
 }
 
@@ -132,19 +141,22 @@ function nameEdges(
   const { x, y, width, depth, factor } = at;
   const middle = x + width / 2;
   const room = width - 12;
-  const back = firstThatFits(
-    sheet,
-    [plan.zip ? `${plan.edges.back} · ${plan.zip.words}` : '', plan.edges.back],
-    room,
-  );
+  const words = (edge: 'back' | 'front') =>
+    firstThatFits(
+      sheet,
+      [plan.zip.edge === edge ? `${plan.edges[edge]} · ${plan.zip.words}` : '', plan.edges[edge]],
+      room,
+    );
   if (depth >= 14) {
+    const back = words('back');
     if (back) sheet.flag(back, middle, y + 4.4, { align: 'center' });
-    const front = firstThatFits(sheet, [plan.edges.front], room);
+    const front = words('front');
     if (front) sheet.flag(front, middle, y + depth - 2, { align: 'center' });
   }
-  const under = Math.max(6, (plan.zip?.wrapMm ?? 0) * factor + 3);
-  flagUpright(sheet, plan.edges.left, x + 4, y + under, depth - under - 3);
-  flagUpright(sheet, plan.edges.right, x + width - 1.8, y + under, depth - under - 3);
+  const wrap = plan.zip.wrapMm * factor + 3;
+  const [above, below] = plan.zip.edge === 'back' ? [Math.max(6, wrap), 3] : [3, Math.max(6, wrap)];
+  flagUpright(sheet, plan.edges.left, x + 4, y + above, depth - above - below);
+  flagUpright(sheet, plan.edges.right, x + width - 1.8, y + above, depth - above - below);
 }
 
 function flagUpright(sheet: Sheet, words: string, x: number, y: number, room: number): void {
@@ -156,26 +168,32 @@ function firstThatFits(sheet: Sheet, candidates: readonly string[], room: number
   return candidates.find((words) => words !== '' && sheet.textWidth(words) <= room);
 }
 
+const bareOf = (format: PlanPlace['format']) => (mm: number) => format(mm).replace(/[″\s]|mm/g, '');
+
+function columnChain(plan: CushionPlan, { x, y, factor, format, stepMm }: PlanPlace): Chain {
+  const fromLeft =
+    plan.datum === 'left' ? plan.columnsMm : [...plan.columnsMm].map((c) => plan.widthMm - c).reverse();
+  const stops = [0, ...fromLeft, plan.widthMm];
+  return {
+    stops: stops.map((mm) => x + mm * factor),
+    labels: spaces(stops, stepMm).map(bareOf(format)),
+    at: y - FIRST_CHAIN_MM,
+    direction: 'level',
+    outwards: -1,
+  };
+}
+
 function drawChains(
   sheet: Sheet,
   plan: CushionPlan,
   place: PlanPlace,
   size: { width: number; depth: number },
 ): void {
-  const { x, y, factor, format } = place;
-  const bare = (mm: number) => format(mm).replace(/[″\s]|mm/g, '');
-  const fromLeft =
-    plan.datum === 'left' ? plan.columnsMm : [...plan.columnsMm].map((c) => plan.widthMm - c).reverse();
-  const stops = [0, ...fromLeft, plan.widthMm];
+  const { x, y, format } = place;
   if (plan.columnsMm.length > 0) {
-    drawChain(sheet, {
-      stops: stops.map((mm) => x + mm * factor),
-      labels: spaces(stops, place.stepMm).map(bare),
-      at: y - 4.6,
-      direction: 'level',
-      outwards: -1,
-    });
-    drawWallChain(sheet, plan, place, { ...size, bare });
+    const columns = columnChain(plan, place);
+    drawChain(sheet, columns);
+    drawWallChain(sheet, plan, place, columns.at - chainDepth(sheet, columns) - WALL_CHAIN_MM + 2);
   }
   const foot = y + size.depth + 6;
   drawChain(sheet, {
@@ -185,51 +203,64 @@ function drawChains(
     direction: 'level',
     outwards: 1,
   });
-  if (plan.wall && plan.wall.gapMm > 0) {
-    const right = plan.wall.side === 'right';
-    const edge = right ? x + size.width : x;
-    const wallX = edge + (right ? 1 : -1) * plan.wall.gapMm * factor;
-    sheet.line(edge, foot, wallX, foot, { pen: PEN.hair });
-    sheet.line(wallX, foot - 1.3, wallX, foot + 1.3, { pen: PEN.hair });
-    sheet.text(`${format(plan.wall.gapMm)} gap`, wallX + (right ? 1 : -1), foot + 1.15, {
-      align: right ? 'left' : 'right',
-    });
-  }
+  drawGap(sheet, plan, place, foot);
+  drawUprightChains(sheet, plan, place, size);
+}
+
+function drawGap(sheet: Sheet, plan: CushionPlan, { x, factor, format }: PlanPlace, foot: number): void {
+  if (!plan.wall || plan.wall.gapMm <= 0) return;
+  const right = plan.wall.side === 'right';
+  const edge = right ? x + plan.widthMm * factor : x;
+  const wallX = edge + (right ? 1 : -1) * plan.wall.gapMm * factor;
+  sheet.line(edge, foot, wallX, foot, { pen: PEN.hair });
+  sheet.line(wallX, foot - 1.3, wallX, foot + 1.3, { pen: PEN.hair });
+  sheet.text(`${format(plan.wall.gapMm)} gap`, wallX + (right ? 1 : -1), foot + 1.15, {
+    align: right ? 'left' : 'right',
+  });
+}
+
+function drawUprightChains(
+  sheet: Sheet,
+  plan: CushionPlan,
+  { x, y, factor, format, stepMm }: PlanPlace,
+  size: { width: number; depth: number },
+): void {
+  const bare = bareOf(format);
+  const outwards = chainSide(plan) === 'left' ? -1 : 1;
+  const edge = outwards === -1 ? x : x + size.width;
+  const whole = plan.rowsMm.length > 0 ? bare(plan.depthMm) : format(plan.depthMm);
   const rowStops = [0, ...plan.rowsMm, plan.depthMm];
+  const rows: Chain = {
+    stops: rowStops.map((mm) => y + mm * factor),
+    labels: spaces(rowStops, stepMm).map(bare),
+    at: edge + outwards * 6.2,
+    direction: 'upright',
+    outwards,
+  };
+  const beyond =
+    plan.rowsMm.length > 0 ? chainDepth(sheet, rows) + sheet.textWidth(whole, { weight: 600 }) / 2 + 2 : 0;
+  if (plan.rowsMm.length > 0) drawChain(sheet, rows);
   drawChain(sheet, {
     stops: [y, y + size.depth],
-    labels: [format(plan.depthMm)],
-    at: x - (plan.rowsMm.length > 0 ? 15.5 : 6.5),
+    labels: [whole],
+    at: rows.at + outwards * beyond,
     direction: 'upright',
-    outwards: -1,
+    outwards,
   });
-  if (plan.rowsMm.length > 0) {
-    drawChain(sheet, {
-      stops: rowStops.map((mm) => y + mm * factor),
-      labels: spaces(rowStops, place.stepMm).map(bare),
-      at: x - 6.5,
-      direction: 'upright',
-      outwards: -1,
-    });
-  }
 }
 
 /** The quiet line: where the columns stand from the wall, for who sets out along it. */
-function drawWallChain(
-  sheet: Sheet,
-  plan: CushionPlan,
-  { x, y, factor }: PlanPlace,
-  { width, bare }: { width: number; bare: (mm: number) => string },
-): void {
+function drawWallChain(sheet: Sheet, plan: CushionPlan, { x, factor, format }: PlanPlace, at: number): void {
   if (!plan.wall) return;
+  const bare = bareOf(format);
+  const width = plan.widthMm * factor;
   const right = plan.wall.side === 'right';
   const wallX = right ? x + width + plan.wall.gapMm * factor : x - plan.wall.gapMm * factor;
-  const at = y - 11.2;
   const onPaper = plan.wall.columnsMm.map((mm) => ({ mm, at: wallX + (right ? -1 : 1) * mm * factor }));
   const farthest = onPaper.at(-1);
   if (!farthest) return;
   sheet.line(wallX, at, farthest.at, at, { pen: PEN.hair });
-  let lastEnd = right ? wallX : wallX;
+  let lastEnd = wallX;
   for (const { mm, at: tick } of onPaper) {
     sheet.line(tick, at - 1, tick, at + 1, { pen: PEN.hair });
     const half = sheet.textWidth(bare(mm)) / 2 + 0.5;
@@ -240,7 +271,7 @@ function drawWallChain(
   }
   const words = 'from the wall';
   const beyond = right ? farthest.at - 2.2 : farthest.at + 2.2;
-  const room = right ? farthest.at - x + PLAN_SPACE.left : x + width + PLAN_SPACE.right - farthest.at;
+  const room = (right ? farthest.at - x : x + width - farthest.at) + PLAN_SPACE.chains;
   if (sheet.textWidth(words) + 3 < room)
     sheet.text(words, beyond, at + 1.15, { align: right ? 'right' : 'left' });
 }

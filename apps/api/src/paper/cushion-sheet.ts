@@ -1,6 +1,6 @@
 import { drawButtonTable } from './button-table';
 import { CHECK_BAR_MM, drawCheckBar } from './check-bar';
-import { type CushionPlan, drawCushionPlan, PLAN_SPACE, spaces } from './cushion-plan';
+import { chainSide, type CushionPlan, drawCushionPlan, PLAN_SPACE, spaceAbove, spaces } from './cushion-plan';
 import { drawCushionCut, drawCushionFront } from './cushion-views';
 import { scaleFor } from './drawing-scale';
 import { paragraph } from './paragraph';
@@ -11,6 +11,7 @@ import {
   bareLength,
   foamWords,
   handWords,
+  marksWords,
   massWords,
   otherSystemWords,
   pairWords,
@@ -50,29 +51,34 @@ function drawFigures(sheet: Sheet, pack: SpecPack, cushion: SpecCushion, frame: 
   sheet.text(hand, right, frame.top + 6.2, { weight: 600, align: 'right' });
 
   const { widthMm, depthMm, thicknessMm } = cushion.finished;
-  const wallGap = cushion.buttons.wall?.gapMm ?? 0;
+  const plan = planOf(cushion, pack);
   const planSpace = {
-    widthMm: width - PLAN_SPACE.left - PLAN_SPACE.right,
+    widthMm: width - PLAN_SPACE.chains - PLAN_SPACE.wall,
     heightMm: frame.bottom - frame.top - FOOT_MM - 62,
   };
   // A usual gap finds room beside the wall's name.
-  const real = { widthMm: widthMm + Math.max(0, wallGap - 40), heightMm: depthMm + thicknessMm };
-  const scale = scaleFor(units.system, real, planSpace);
+  const gap = Math.max(0, (plan.wall?.gapMm ?? 0) - 40);
+  const scale = scaleFor(
+    units.system,
+    { widthMm: widthMm + gap, heightMm: depthMm + thicknessMm },
+    planSpace,
+  );
   const { factor } = scale;
-  const quietLine = cushion.buttons.wall ? 8 : 0;
+  const before = chainSide(plan) === 'left' ? PLAN_SPACE.chains : PLAN_SPACE.wall + gap * factor;
   const place = {
-    x: left + PLAN_SPACE.left + (cushion.buttons.wall?.side === 'left' ? wallGap * factor : 0),
-    y: frame.top + 21 + quietLine,
+    x: left + before,
+    y: frame.top + 12,
     factor,
     format: (mm: number) => formatLength(mm, { ...units, feet: false }),
     stepMm: lengthStep(units),
   };
-  drawCushionPlan(sheet, planOf(cushion, pack), place);
+  place.y += spaceAbove(sheet, plan, place);
+  drawCushionPlan(sheet, plan, place);
 
   let y = place.y + depthMm * factor + PLAN_SPACE.bottom;
   y = drawSums(sheet, pack, cushion, { x: left, y, width });
   const front = y + 9.5;
-  sheet.text('From the front', left, y + 5.4);
+  sheet.text(cushion.kind === 'seat' ? 'From the front' : 'From above', left, y + 5.4);
   drawCushionFront(
     sheet,
     {
@@ -93,26 +99,33 @@ function drawFigures(sheet: Sheet, pack: SpecPack, cushion: SpecCushion, frame: 
 }
 
 function planOf(cushion: SpecCushion, { units }: SpecPack): CushionPlan {
-  const { zip } = cushion;
-  const { rowsMm, columnsMm, datum, boardLinesMm, wall } = cushion.buttons;
+  const { zip, edges, finished } = cushion;
+  const { rowsMm, columnsMm, datum, boardLinesMm } = cushion.buttons;
+  const { side, name, toSeamMm, columnsMm: fromDatum } = datum;
   return {
-    widthMm: cushion.finished.widthMm,
-    depthMm: cushion.finished.depthMm,
+    widthMm: finished.widthMm,
+    depthMm: finished.depthMm,
     columnsMm,
     rowsMm,
-    datum,
+    datum: side,
     boardLinesMm,
-    wall,
-    edges: cushion.edges,
-    zip: zip && { lengthMm: zip.lengthMm, wrapMm: zip.wrapMm, words: `zip ${zipSum(zip, units)}` },
+    wall: datum.drawn ? { side, gapMm: toSeamMm, columnsMm: fromDatum, name } : null,
+    edges,
+    zip: { edge: zip.edge, wrapMm: zip.wrapMm, words: `zip ${zipWords(cushion, units)}` },
   };
 }
 
-function zipSum(zip: NonNullable<SpecCushion['zip']>, units: SpecPack['units']): string {
-  const whole = formatLength(zip.lengthMm, { ...units, feet: false });
-  if (zip.wrapMm <= 0) return whole;
-  const wrap = bareLength(zip.wrapMm, units);
-  return `${whole} = ${wrap} + ${bareLength(zip.edgeMm, units)} + ${wrap}`;
+/** The zip as a sum of rounded parts, so that it closes. */
+function zipLengthMm({ zip }: SpecCushion, units: SpecPack['units']): number {
+  const step = lengthStep(units);
+  const round = (mm: number) => Math.round(mm / step) * step;
+  return round(zip.edgeMm) + 2 * round(zip.wrapMm);
+}
+
+function zipWords(cushion: SpecCushion, units: SpecPack['units']): string {
+  const wrap = bareLength(cushion.zip.wrapMm, units);
+  const whole = formatLength(zipLengthMm(cushion, units), { ...units, feet: false });
+  return `${whole} = ${wrap} + ${bareLength(cushion.zip.edgeMm, units)} + ${wrap}`;
 }
 
 /** The chains once more as sums, for whoever sets out with a rule. */
@@ -123,7 +136,7 @@ function drawSums(
   at: { x: number; y: number; width: number },
 ): number {
   const { units } = pack;
-  const { columnsMm, rowsMm, wall } = cushion.buttons;
+  const { columnsMm, rowsMm, datum, seamName } = cushion.buttons;
   if (columnsMm.length === 0 || rowsMm.length === 0) return at.y;
   const step = lengthStep(units);
   const sum = (stops: readonly number[], whole: number) => {
@@ -132,11 +145,11 @@ function drawSums(
   };
   const seam = cushion.kind === 'seat' ? 'back' : 'top';
   const lines = [
-    `From the ${cushion.buttons.datumName} seam ${sum(columnsMm, cushion.finished.widthMm)}.`,
+    `From the ${seamName} seam ${sum(columnsMm, cushion.finished.widthMm)}.`,
     `Rows from the ${seam} seam ${sum(rowsMm, cushion.finished.depthMm)}.` +
-      (wall
-        ? ` Quiet line: from the ${wall.name}, ${formatLength(wall.gapMm, { ...units, feet: false })} from wall to seam.`
-        : ''),
+      (datum.drawn
+        ? ` Quiet line: from the ${datum.name}, ${formatLength(datum.toSeamMm, { ...units, feet: false })} from there to the seam.`
+        : ` The ${datum.name} is ${formatLength(datum.toSeamMm, { ...units, feet: false })} from that seam.`),
   ];
   sheet.line(at.x, at.y, at.x + at.width, at.y, { pen: PEN.fine });
   let y = at.y + 4.4;
@@ -167,7 +180,7 @@ function drawFoot(
   const { units } = pack;
   sheet.line(at.left, at.top, at.right, at.top, { pen: PEN.fine });
   const rows = cushion.buttons.rowsMm.length > 0;
-  const words = `Cut ${rows ? 'at a button row' : 'through the middle'}, ${cushion.kind === 'seat' ? 'front at the right, seat not loaded' : 'face up'}`;
+  const words = `Cut ${rows ? 'at a button row' : 'through the middle'}, ${cushion.kind === 'seat' ? 'front at the right' : 'face up'}`;
   sheet.text(words, at.left, at.top + 4.6);
   const barX = at.right - CHECK_BAR_MM;
   const most = (barX - at.left - 34) / cushion.finished.depthMm;
@@ -233,47 +246,45 @@ function drawHeroSize(sheet: Sheet, cushion: SpecCushion, { units }: SpecPack, x
 
 function factsOf(cushion: SpecCushion, pack: SpecPack): Fact[] {
   const { units, words } = pack;
-  const { zip, boxing, plates, edges } = cushion;
-  const bold = (text: string) => [{ text, weight: 600 as const }];
+  const { boxing, plates, board, zip } = cushion;
+  const show = (mm: number) => formatLength(mm, { ...units, feet: false });
   const count = cushion.buttons.columnsMm.length * cushion.buttons.rowsMm.length;
   const on = cushion.benches.map((bench, i) => `${cushion.marks[i]} for ${bench}`);
-  const make = `${cushion.marks.length}, ${handWords(cushion.hand)}: ${on.slice(0, 6).join(', ')}${on.length > 6 ? ' …' : ''}`;
-  return [
-    { label: 'Make', value: bold(make) },
-    { label: 'Edges', value: bold(`${edges.left} · ${edges.right} · ${edges.front}`) },
-    {
-      label: 'Foam',
-      value: bold(
-        `${sizeWords(cushion.foam, units)}, ${foamWords(cushion, units)}; ${volumeWords(cushion.foamVolumeM3, units)}, ${massWords(cushion.foamMassKg, units)} each`,
-      ),
-    },
-    {
-      label: 'Cut',
-      value: bold(
-        `2 plates ${pairWords(plates.widthMm, plates.depthMm, units)}; boxing ${formatLength(boxing.cutHeightMm, { ...units, feet: false })} wide`,
-      ),
-    },
-    {
-      label: 'Welt',
-      value: bold(
-        `both seams, 2 × ${formatLength(cushion.perimeterMm, { ...units, feet: false })} = ${runWords(cushion.weltMm, units)} with joins`,
-      ),
-    },
-    {
-      label: 'Closure',
-      value: bold(
-        zip
-          ? `Zip ${zipSum(zip, units)}; boxing ${formatLength(boxing.lengthMm, { ...units, feet: false })} makes up ${formatLength(cushion.perimeterMm, { ...units, feet: false })} round`
-          : `Boxing ${formatLength(boxing.lengthMm, { ...units, feet: false })} round`,
-      ),
-    },
-    {
-      label: 'Buttons',
-      value: bold(count > 0 ? `${count}${words.buttons ? `, ${brief(words.buttons)}` : ''}` : 'none'),
-    },
-    ...(words.cover ? [{ label: 'Cover', value: bold(brief(words.cover)) }] : []),
-    ...(words.fixing ? [{ label: 'Fixing', value: bold(brief(words.fixing)) }] : []),
+  const made = `${on.slice(0, 6).join(', ')}${on.length > 6 ? ' …' : ''}`;
+  const zipLength = zipLengthMm(cushion, units);
+  const facts: [string, string][] = [
+    ['Make', `${cushion.marks.length}, ${handWords(cushion.hand)}: ${made}${mirrorWords(cushion)}`],
+    ['Edges', cushion.meets],
+    [
+      'Foam',
+      `${sizeWords(cushion.foam, units)}, ${foamWords(cushion, units)}; ` +
+        `${volumeWords(cushion.foamVolumeM3, units)}, ${massWords(cushion.foamMassKg, units)} each`,
+    ],
+    [
+      'Cut',
+      `2 plates ${pairWords(plates.widthMm, plates.depthMm, units)}; boxing ` +
+        `${pairWords(boxing.cutHeightMm, boxing.cutLengthMm, units)}; 2 zip halves ` +
+        pairWords(zip.halfWidthMm, zip.halfLengthMm, units),
+    ],
+    ['Welt', `both seams, 2 × ${show(cushion.perimeterMm)} and joins: ${runWords(cushion.weltMm, units)}`],
+    [
+      'Closure',
+      `Zip ${zipWords(cushion, units)}; boxing ${show(cushion.perimeterMm - zipLength)} makes up ` +
+        `${show(cushion.perimeterMm)} round`,
+    ],
+    ['Buttons', count > 0 ? `${count}${words.buttons ? `, ${brief(words.buttons)}` : ''}` : 'none'],
+    ['Board', `${pairWords(board.widthMm, board.depthMm, units)}, if one is asked for`],
+    ['Cover', words.cover && brief(words.cover)],
+    ['Fixing', words.fixing && brief(words.fixing)],
   ];
+  return facts
+    .filter(([, value]) => value !== '')
+    .map(([label, value]) => ({ label, value: [{ text: value, weight: 600 }] }));
+}
+
+function mirrorWords({ mirrorMarks }: SpecCushion): string {
+  if (mirrorMarks.length === 0) return '';
+  return `; ${marksWords(mirrorMarks)} ${mirrorMarks.length === 1 ? 'is' : 'are'} the mirror image`;
 }
 
 /** Long words stand once, on the first sheet. */

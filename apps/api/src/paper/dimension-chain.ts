@@ -29,7 +29,9 @@ const styleOf = (chain: Chain): TextStyle => ({ size: 9, weight: chain.quiet ? 4
 /** How far beyond its line a chain needs paper, on its outward side. */
 export function chainDepth(sheet: Sheet, chain: Chain): number {
   const rows = Math.max(0, ...place(sheet, chain).map(({ row }) => row));
-  return rows === 0 ? LABEL_HEIGHT_MM / 2 : rows * rowPitch(sheet, chain) + LABEL_HEIGHT_MM / 2;
+  return (
+    standOff(sheet, chain, rows) + (chain.direction === 'level' ? LABEL_HEIGHT_MM : widest(sheet, chain)) / 2
+  );
 }
 
 /** A run of dimensions: ticks at every stop, each label in its space or, where it has no room, beside the line. */
@@ -44,28 +46,34 @@ export function drawChain(sheet: Sheet, chain: Chain): void {
     level ? sheet.line(a1, c1, a2, c2, { pen: width }) : sheet.line(c1, a1, c2, a2, { pen: width });
   stroke(first, at, last, at, pen);
   for (const stop of stops) stroke(stop, at - TICK_MM, stop, at + TICK_MM, pen);
-  const pitch = rowPitch(sheet, chain);
   for (const { label, middle, row } of place(sheet, chain)) {
-    const across = at + outwards * row * pitch;
-    if (row > 0) stroke(middle, at, middle, across - outwards * (level ? 1.6 : 1), PEN.hair);
+    const across = at + outwards * standOff(sheet, chain, row);
+    if (row > 0) stroke(middle, at, middle, across, PEN.hair);
     if (level) sheet.flag(label, middle, across + 1.15, styleOf(chain));
     else sheet.flag(label, across, middle + 1.15, styleOf(chain));
   }
 }
 
-function rowPitch(sheet: Sheet, chain: Chain): number {
-  if (chain.direction === 'level') return ROW_MM;
-  return Math.max(...chain.labels.map((label) => sheet.textWidth(label, styleOf(chain)))) + 2.4;
+/** Distance of a row of labels from the line. */
+function standOff(sheet: Sheet, chain: Chain, row: number): number {
+  if (row === 0) return 0;
+  if (chain.direction === 'level') return row * ROW_MM;
+  const width = widest(sheet, chain);
+  return width / 2 + 2 + (row - 1) * (width + 1.2);
+}
+
+function widest(sheet: Sheet, chain: Chain): number {
+  return Math.max(...chain.labels.map((label) => sheet.textWidth(label, styleOf(chain))));
 }
 
 function place(sheet: Sheet, chain: Chain): Placed[] {
   const extent = (label: string) =>
-    chain.direction === 'level' ? sheet.textWidth(label, styleOf(chain)) + 1.6 : LABEL_HEIGHT_MM;
+    chain.direction === 'level' ? sheet.textWidth(label, styleOf(chain)) + 1 : LABEL_HEIGHT_MM;
   const taken: [number, number][][] = [];
   return gather(chain, extent).map(({ label, from, to }) => {
     const middle = (from + to) / 2;
     const size = extent(label);
-    if (size + 1.2 <= to - from) return { label, middle, row: 0 };
+    if (size + 0.6 <= to - from) return { label, middle, row: 0 };
     let row = 1;
     const low = middle - size / 2;
     const high = middle + size / 2;
@@ -82,7 +90,7 @@ function gather(chain: Chain, extent: (label: string) => number) {
     const from = chain.stops[index] ?? 0;
     const to = chain.stops[index + 1] ?? from;
     const last = groups.at(-1);
-    const cramped = extent(label) + 1.2 > to - from;
+    const cramped = extent(label) + 0.6 > to - from;
     if (last && cramped && last.each === label) {
       last.to = to;
       last.count += 1;

@@ -15,7 +15,7 @@ const PENS: Record<Pen, number> = {
   fine: PEN.fine,
   edge: PEN.edge,
   outline: 0.5,
-  cut: PEN.cut,
+  cut: 0.6,
 };
 
 /** Greys that survive a copy; timber stays white, so that lines carry the drawing. */

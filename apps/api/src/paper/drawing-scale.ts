@@ -22,7 +22,7 @@ const INCH_SCALES: readonly [number, string][] = [
   [384, '¹⁄₃₂″ = 1′\u00a00″'],
   [768, '¹⁄₆₄″ = 1′\u00a00″'],
 ];
-const METRIC_SCALES = [4, 5, 10, 20, 25, 50, 100, 200, 250, 500, 1000];
+const METRIC_SCALES = [4, 5, 10, 15, 20, 25, 30, 40, 50, 75, 100, 200, 250, 500, 1000];
 
 /** The largest scale of a shop's ruler at which the thing fits the space. */
 export function scaleFor(

@@ -22,7 +22,7 @@ const PAD = 4;
 const FACTS_WIDTH_MM = 98;
 const SIGN_MM = 14;
 /** Rows of cushions that share the first sheet with the drawings; longer lists get sheets of their own. */
-const LIST_SHARE = 0.4;
+const LIST_SHARE = 0.28;
 
 /** The first sheet, and further ones where the list of cushions or the words of the order need them. */
 export function drawOverview(pdf: Pack, pack: SpecPack): void {
@@ -193,8 +193,8 @@ function listRow(cushion: SpecCushion, { units }: SpecPack): string[] {
     sizeWords(cushion.finished, units),
     sizeWords(cushion.foam, units),
     pairWords(cushion.plates.widthMm, cushion.plates.depthMm, units),
-    `${bareLength(cushion.boxing.cutHeightMm, units)} × ${show(cushion.boxing.lengthMm)}`,
-    cushion.zip ? show(cushion.zip.lengthMm) : 'none',
+    `${bareLength(cushion.boxing.cutHeightMm, units)} × ${show(cushion.boxing.cutLengthMm)}`,
+    show(cushion.zip.edgeMm + 2 * cushion.zip.wrapMm),
     show(cushion.weltMm),
   ];
 }

@@ -7,20 +7,30 @@ export interface Size {
   thicknessMm: number;
 }
 
+/** The line that button columns of a whole bench are measured from. */
+export interface DatumLine {
+  /** "wall W1", "end wall", "bench end". */
+  name: string;
+  /** The side of the page it stands on. */
+  side: 'left' | 'right';
+  toSeamMm: number;
+  /** Of each column, rising from the datum. */
+  columnsMm: readonly number[];
+  /** A wall near enough to stand on the drawing. */
+  drawn: boolean;
+}
+
 /** Where the buttons of a cushion stand. */
 export interface ButtonPlan {
-  /** From the seam that is named below, rising. */
+  /** From the cushion's own seam on the datum's side, rising. */
   columnsMm: readonly number[];
   /** From the back seam (of a back cushion: the top seam), rising. */
   rowsMm: readonly number[];
-  /** The side of the page the columns are measured from. */
-  datum: 'left' | 'right';
-  /** "window-end": whose seam that is. */
-  datumName: string;
+  /** "wall-end": whose seam that is. */
+  seamName: string;
+  datum: DatumLine;
   /** Board joints behind or under the cushion, measured like the columns. */
   boardLinesMm: readonly number[];
-  /** The wall or end that the columns line up with; null when the run stands free. */
-  wall: { side: 'left' | 'right'; gapMm: number; columnsMm: readonly number[]; name: string } | null;
 }
 
 /** Cushions that are made alike, as the sheets show them. */
@@ -28,6 +38,8 @@ export interface SpecCushion {
   marks: readonly string[];
   /** Marks of the benches, in the order of the cushions. */
   benches: readonly string[];
+  /** Marks of those that are the mirror image. */
+  mirrorMarks: readonly string[];
   kind: 'seat' | 'back';
   /** As sat in. */
   hand: 'left' | 'right' | 'either';
@@ -37,14 +49,17 @@ export interface SpecCushion {
   foamVolumeM3: number;
   foamMassKg: number;
   plates: { widthMm: number; depthMm: number };
-  boxing: { cutHeightMm: number; lengthMm: number };
-  /** Along the edge and round each corner; null when the cover closes without one. */
-  zip: { lengthMm: number; edgeMm: number; wrapMm: number } | null;
+  board: { widthMm: number; depthMm: number };
+  boxing: { cutHeightMm: number; cutLengthMm: number; finishedLengthMm: number };
+  /** Along one long edge and round both its corners; with the boxing it makes up the perimeter. */
+  zip: { edge: 'back' | 'front'; edgeMm: number; wrapMm: number; halfWidthMm: number; halfLengthMm: number };
   weltMm: number;
   perimeterMm: number;
   buttons: ButtonPlan;
-  /** What each edge meets, by the sides of the page. */
+  /** Words on the edges of the drawing, by the sides of the page. */
   edges: { back: string; front: string; left: string; right: string };
+  /** What each edge meets, in one sentence. */
+  meets: string;
 }
 
 /** The words of the order that stand on every pack. */

@@ -35,22 +35,23 @@ function titleCells(
     ? [marksWords(cushion.marks), `${cushion.kind}, ${handWords(cushion.hand)}, make ${cushion.marks.length}`]
     : [marksWords(all), all.length === 1 ? 'one cushion' : `${all.length} cushions`];
   return [
-    { label: 'Production, set', lines: [pack.production, pack.set], widthMm: 48 },
+    { label: 'Production, set', lines: [pack.production, pack.set], widthMm: 47 },
     { label: 'Marks on this sheet', lines: marks, widthMm: 46 },
-    { label: 'Workshop', lines: [workshop.name, workshop.telephone].filter(Boolean), widthMm: 42 },
+    { label: 'Workshop', lines: [workshop.name, workshop.telephone].filter(Boolean), widthMm: 37 },
     {
       label: 'For',
       lines: [
-        [order.upholsterer, `order ${order.number}`].filter(Boolean).join(', '),
+        order.upholsterer ?? 'no upholsterer yet',
+        `order ${order.number}`,
         order.neededBy ? `needed ${order.neededBy}` : 'no date set',
       ],
     },
     {
       label: 'Issued',
       lines: [revision.issuedOn, revision.issuedBy && `by ${revision.issuedBy}`].filter(Boolean),
-      widthMm: 38,
+      widthMm: 35,
     },
-    { label: 'Sheet', lines: [`${number} of ${count}`], widthMm: 19 },
+    { label: 'Sheet', lines: [`${number} of ${count}`], widthMm: 18 },
     { label: 'Revision', lines: [revision.letter], widthMm: 18, large: true },
   ];
 }

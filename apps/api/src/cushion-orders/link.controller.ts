@@ -1,0 +1,85 @@
+import {
+  Body,
+  Controller,
+  Get,
+  HttpCode,
+  Param,
+  Post,
+  Req,
+  StreamableFile,
+  UseInterceptors,
+} from '@nestjs/common';
+import { ApiOkResponse, ApiProduces, ApiTags } from '@nestjs/swagger';
+import type { Request } from 'express';
+import { Access } from '../common/access.decorator';
+import { RateLimits } from '../rate-limits/rate-limits.service';
+import { PublicOrderDto } from './dto/public-order.dto';
+import { AcknowledgeDto, WriteMessageDto } from './dto/write-order.dto';
+import { LinkService } from './link.service';
+import { OrderPaper } from './order-paper.service';
+import { OrderViews } from './order-views.service';
+import { pdfFile } from './pdf-file';
+import { PrivatePage } from './private-page.interceptor';
+
+/** The upholsterer's way in: no account, one order. */
+@ApiTags('order link')
+@Controller('link/:token')
+@Access('link')
+@UseInterceptors(PrivatePage)
+export class LinkController {
+  constructor(
+    private readonly links: LinkService,
+    private readonly views: OrderViews,
+    private readonly paper: OrderPaper,
+    private readonly limits: RateLimits,
+  ) {}
+
+  @Get()
+  @ApiOkResponse({ type: PublicOrderDto })
+  async read(@Param('token') token: string, @Req() request: Request): Promise<PublicOrderDto> {
+    await this.limits.take('link-ip', request.ip ?? '');
+    return this.views.public(await this.links.open(token));
+  }
+
+  @Get('spec.pdf')
+  @ApiProduces('application/pdf')
+  @ApiOkResponse({ schema: { type: 'string', format: 'binary' } })
+  async specPdf(@Param('token') token: string, @Req() request: Request): Promise<StreamableFile> {
+    await this.limits.take('link-ip', request.ip ?? '');
+    const { order, sent } = await this.links.open(token);
+    return pdfFile(await this.paper.pack(order, sent), order.number, sent.revisionLetter);
+  }
+
+  @Post('acknowledge')
+  @HttpCode(200)
+  @ApiOkResponse({ type: PublicOrderDto })
+  async acknowledge(
+    @Param('token') token: string,
+    @Req() request: Request,
+    @Body() body: AcknowledgeDto,
+  ): Promise<PublicOrderDto> {
+    await this.limitAnswers(token, request);
+    await this.links.acknowledge(token, body.name);
+    return this.views.public(await this.links.open(token));
+  }
+
+  @Post('reply')
+  @HttpCode(200)
+  @ApiOkResponse({ type: PublicOrderDto })
+  async reply(
+    @Param('token') token: string,
+    @Req() request: Request,
+    @Body() body: WriteMessageDto,
+  ): Promise<PublicOrderDto> {
+    await this.limitAnswers(token, request);
+    await this.links.reply(token, body.text);
+    return this.views.public(await this.links.open(token));
+  }
+
+  /** By order and not by token: each mail brings a token of its own. */
+  private async limitAnswers(token: string, request: Request): Promise<void> {
+    await this.limits.take('link-ip', request.ip ?? '');
+    const { order } = await this.links.open(token);
+    await this.limits.take('link-answer', order.id);
+  }
+}

@@ -1,0 +1,233 @@
+import { Injectable } from '@nestjs/common';
+import { InjectDataSource } from '@nestjs/typeorm';
+import { DataSource, type EntityManager } from 'typeorm';
+import { AuditService } from '../audit/audit.service';
+import type { MemberInfo } from '../common/access.decorator';
+import type { Page, PageQuery } from '../common/page.dto';
+import { Problem } from '../common/problem';
+import { readPage } from '../common/read-page';
+import { InjectSettings, type Settings } from '../config/settings';
+import { MailService } from '../mail/mail.service';
+import { ProductionsService } from '../productions/productions.service';
+import { UpholsterersService } from '../upholsterers/upholsterers.service';
+import { UsersService } from '../users/users.service';
+import { WorkshopsService } from '../workshops/workshops.service';
+import { dayInWords } from './day-in-words';
+import type { SendOrderDto } from './dto/write-order.dto';
+import { CushionOrder } from './entities/cushion-order.entity';
+import { OrderMessage } from './entities/order-message.entity';
+import { findOrder, lockOrder, type OrderPlace } from './order-access';
+import { contentOf } from './order-content';
+import { makeLink, revokeLinks } from './order-links';
+import {
+  type OrderLetter,
+  orderMail,
+  OUTGOING_KINDS,
+  renewedLinkMail,
+  workshopMessageMail,
+} from './order-mail';
+import { OrderPaper } from './order-paper.service';
+import { recordEvent } from './order-record';
+import { isOver, maySend, STATE_WORDS } from './order-states';
+
+/** What goes to the upholsterer: the order, messages, links. Each mail is queued with what it tells of. */
+@Injectable()
+export class OrderCorrespondence {
+  constructor(
+    @InjectDataSource() private readonly dataSource: DataSource,
+    @InjectSettings() private readonly config: Settings,
+    private readonly paper: OrderPaper,
+    private readonly productions: ProductionsService,
+    private readonly upholsterers: UpholsterersService,
+    private readonly users: UsersService,
+    private readonly workshops: WorkshopsService,
+    private readonly mail: MailService,
+    private readonly audit: AuditService,
+  ) {}
+
+  async send(member: MemberInfo, place: OrderPlace, dto: SendOrderDto): Promise<CushionOrder> {
+    const sender = await this.users.requireConfirmedEmail(member.userId);
+    await this.productions.forChanging(member, place.productionId);
+    return this.dataSource.transaction(async (manager) => {
+      const order = await lockOrder(manager, place);
+      if (!maySend(order.state)) {
+        throw Problem.conflict(
+          'order-not-sendable',
+          `An order that is ${STATE_WORDS[order.state]} is not sent again.`,
+        );
+      }
+      const upholsterer = await this.upholsterers.get(member.workshopId, dto.upholstererId, manager);
+      if (order.upholstererId !== null && order.upholstererId !== upholsterer.id) {
+        await revokeLinks(manager, order.id);
+      }
+      const before = order.state;
+      order.state = 'sent';
+      order.upholstererId = upholsterer.id;
+      order.upholsterer = upholsterer;
+      order.sent = {
+        ...contentOf(order),
+        at: new Date().toISOString(),
+        byUserId: sender.id,
+        byName: sender.name,
+      };
+      await manager.save(order);
+      const message = dto.message ?? '';
+      if (message !== '') await this.keepMessage(manager, order, sender, message);
+      await recordEvent(manager, order, {
+        kind: 'sent',
+        byId: sender.id,
+        byName: sender.name,
+        fromState: before,
+      });
+      await this.record(manager, member, 'cushion-order.sent', order.id);
+      const letter = await this.letter(manager, order, sender, message);
+      const pack = {
+        filename: `cushion-order-${order.number}-${order.revisionLetter}.pdf`,
+        content: await this.paper.pack(order, order.sent),
+      };
+      await this.post(manager, order, orderMail(letter, pack));
+      return findOrder(manager, place);
+    });
+  }
+
+  async messages(place: OrderPlace, page: PageQuery): Promise<Page<OrderMessage>> {
+    const order = await findOrder(this.dataSource.manager, place);
+    const select = this.dataSource.manager
+      .createQueryBuilder(OrderMessage, 'message')
+      .where('message.orderId = :orderId', { orderId: order.id });
+    return readPage(select, page, {
+      sortable: { at: 'message.at' },
+      defaultSort: 'at',
+      tieBreak: 'message.id',
+      searchIn: ['message.text'],
+    });
+  }
+
+  async write(member: MemberInfo, place: OrderPlace, text: string): Promise<OrderMessage> {
+    const author = await this.users.requireConfirmedEmail(member.userId);
+    return this.dataSource.transaction(async (manager) => {
+      const order = await lockOrder(manager, place);
+      requireCorrespondent(order);
+      const message = await this.keepMessage(manager, order, author, text);
+      await this.post(manager, order, workshopMessageMail(await this.letter(manager, order, author, text)));
+      return message;
+    });
+  }
+
+  async renewLink(member: MemberInfo, place: OrderPlace): Promise<CushionOrder> {
+    const author = await this.users.requireConfirmedEmail(member.userId);
+    return this.dataSource.transaction(async (manager) => {
+      const order = await lockOrder(manager, place);
+      requireCorrespondent(order);
+      await revokeLinks(manager, order.id);
+      await recordEvent(manager, order, { kind: 'link-renewed', byId: author.id, byName: author.name });
+      await this.record(manager, member, 'cushion-order.link-renewed', order.id);
+      await this.post(manager, order, renewedLinkMail(await this.letter(manager, order, author, '')));
+      return findOrder(manager, place);
+    });
+  }
+
+  async revokeLink(member: MemberInfo, place: OrderPlace): Promise<CushionOrder> {
+    const author = await this.users.get(member.userId);
+    return this.dataSource.transaction(async (manager) => {
+      const order = await lockOrder(manager, place);
+      const ended = await revokeLinks(manager, order.id);
+      if (ended > 0) {
+        await recordEvent(manager, order, { kind: 'link-revoked', byId: author.id, byName: author.name });
+        await this.record(manager, member, 'cushion-order.link-revoked', order.id);
+      }
+      return findOrder(manager, place);
+    });
+  }
+
+  /** A mail that failed, or that nobody knows to have gone out, is sent once more because a person says so. */
+  async sendMailAgain(member: MemberInfo, place: OrderPlace): Promise<CushionOrder> {
+    await this.users.requireConfirmedEmail(member.userId);
+    return this.dataSource.transaction(async (manager) => {
+      const order = await lockOrder(manager, place);
+      const last = await this.mail.latestAbout(manager, order.id, OUTGOING_KINDS);
+      if (!last || !(await this.mail.sendAgain(manager, last.id))) {
+        throw Problem.conflict('mail-not-stuck', 'The last mail about this order needs no second sending.');
+      }
+      await this.record(manager, member, 'cushion-order.mail-sent-again', order.id);
+      return findOrder(manager, place);
+    });
+  }
+
+  private async letter(
+    manager: EntityManager,
+    order: CushionOrder,
+    sender: { id: string; name: string; email: string },
+    message: string,
+  ): Promise<OrderLetter> {
+    const workshop = await this.workshops.get(order.workshopId, manager);
+    const { token, expiresAt } = await makeLink(manager, order.id);
+    const content = order.sent ?? order;
+    return {
+      workshopName: workshop.name,
+      workshopTelephone: workshop.telephone,
+      senderName: sender.name,
+      senderEmail: sender.email,
+      upholstererName: order.upholsterer?.name ?? '',
+      upholstererEmail: order.upholsterer?.email ?? '',
+      contactName: order.upholsterer?.contactName ?? '',
+      number: order.number,
+      title: content.title,
+      revisionLetter: content.revisionLetter,
+      neededBy: content.neededBy === null ? null : dayInWords(content.neededBy),
+      cushionCount: order.cushionCount,
+      linkUrl: `${this.config.publicUrl}/order/${token}`,
+      linkExpires: dayInWords(expiresAt.toISOString().slice(0, 10)),
+      message,
+    };
+  }
+
+  private keepMessage(
+    manager: EntityManager,
+    order: CushionOrder,
+    author: { id: string; name: string },
+    text: string,
+  ): Promise<OrderMessage> {
+    const { id: authorId, name: authorName } = author;
+    return manager.save(
+      manager.create(OrderMessage, { orderId: order.id, side: 'workshop', authorId, authorName, text }),
+    );
+  }
+
+  private async post(
+    manager: EntityManager,
+    order: CushionOrder,
+    mail: Parameters<MailService['enqueue']>[1],
+  ): Promise<void> {
+    await this.mail.enqueue(manager, { ...mail, workshopId: order.workshopId, relatedId: order.id });
+  }
+
+  private record(manager: EntityManager, member: MemberInfo, action: string, orderId: string): Promise<void> {
+    const { workshopId, userId } = member;
+    return this.audit.record(manager, {
+      workshopId,
+      userId,
+      action,
+      subjectType: 'cushion-order',
+      subjectId: orderId,
+    });
+  }
+}
+
+function requireCorrespondent(order: CushionOrder): void {
+  if (order.sent === null || !order.upholsterer) {
+    throw Problem.conflict('order-not-sent', 'Nobody has this order yet. Send it first.');
+  }
+  if (order.upholsterer.removedAt !== null) {
+    throw Problem.conflict(
+      'upholsterer-removed',
+      'The upholsterer is no longer in the address book. Send the order to another.',
+    );
+  }
+  if (isOver(order.state)) {
+    throw Problem.conflict(
+      'order-over',
+      `The order is ${STATE_WORDS[order.state]}; nothing more goes out about it.`,
+    );
+  }
+}

@@ -1,0 +1,116 @@
+import { type CushionDatum, type CushionSpec, type EdgeMeets, groupCushions } from '@settlewright/geometry';
+import type { DatumLine, SpecCushion } from '../paper/spec-pack';
+
+const MEETS: Record<EdgeMeets, string> = {
+  wall: 'wall',
+  'end-wall': 'end wall',
+  arm: 'arm',
+  neighbour: 'next cushion',
+  'corner-cushion': 'corner cushion',
+  free: 'free',
+  'back-pad': 'back pad',
+  front: 'front edge',
+  'seat-cushion': 'seat cushion',
+  top: 'top edge',
+};
+
+/** A wall further away than this is said in words and not drawn. */
+const DRAWN_WITHIN_MM = 100;
+
+/** Cushions as the sheets show them: those that come out of the same drawing stand together. */
+export function specCushions(specs: readonly CushionSpec[]): SpecCushion[] {
+  const groups = new Map<string, CushionSpec[]>();
+  for (const spec of specs) {
+    const key = likeness(spec);
+    groups.set(key, [...(groups.get(key) ?? []), spec]);
+  }
+  const mirrored = new Map(
+    groupCushions(specs).flatMap(({ marks, mirroredMarks }) => marks.map((mark) => [mark, mirroredMarks])),
+  );
+  return [...groups.values()].map((alike) => specCushion(alike, mirrored));
+}
+
+function specCushion(alike: readonly CushionSpec[], mirrored: ReadonlyMap<string, string[]>): SpecCushion {
+  const [spec] = alike;
+  if (!spec) throw new Error('a group of cushions is empty');
+  const { cut, buttons, zipEdge } = spec;
+  return {
+    marks: alike.map(({ mark }) => mark),
+    benches: alike.map(({ benchMark }) => benchMark),
+    mirrorMarks: mirrored.get(spec.mark) ?? [],
+    kind: spec.kind,
+    hand: spec.hand,
+    finished: spec.finishedMm,
+    foam: cut.foamMm,
+    foamGrade: { ...spec.foam, name: spec.foam.grade },
+    foamVolumeM3: cut.foamVolumeM3,
+    foamMassKg: cut.foamMassKg,
+    plates: cut.plates,
+    board: cut.boardMm,
+    boxing: cut.boxing,
+    zip: {
+      edge: zipEdge === 'back' ? 'back' : 'front',
+      edgeMm: cut.zip.edgeMm,
+      wrapMm: cut.zip.wrapMm,
+      halfWidthMm: cut.zipPanel.halfWidthMm,
+      halfLengthMm: cut.zipPanel.lengthMm,
+    },
+    weltMm: cut.welt.lengthMm,
+    perimeterMm: cut.perimeterMm,
+    buttons: {
+      columnsMm: buttons.columns.map(({ fromSeamMm }) => fromSeamMm),
+      rowsMm: buttons.rowsMm,
+      seamName: seamName(spec.datum),
+      datum: datumLine(spec),
+      boardLinesMm: spec.boardLinesMm,
+    },
+    edges: edgeWords(spec),
+    meets: meetsWords(spec),
+  };
+}
+
+/** Everything that shows on a sheet, to a tenth of a millimetre. */
+function likeness(spec: CushionSpec): string {
+  const { kind, hand, edges, finishedMm, cut, zipEdge, foam, buttons, boardLinesMm, datum } = spec;
+  const { wallMark: _, ...datumLike } = datum;
+  const shown = { kind, hand, edges, finishedMm, cut, zipEdge, foam, buttons, boardLinesMm, datumLike };
+  return JSON.stringify(shown, (_key, value: unknown) =>
+    typeof value === 'number' ? Math.round(value * 10) / 10 : value,
+  );
+}
+
+function datumLine({ datum, buttons }: CushionSpec): DatumLine {
+  return {
+    name: datum.meets === 'bench-end' ? 'bench end' : MEETS[datum.meets],
+    // Drawn with its back edge up, a cushion has the sitter's left at the right of the page.
+    side: datum.side === 'left' ? 'right' : 'left',
+    toSeamMm: datum.toSeamMm,
+    columnsMm: buttons.columns.map(({ fromDatumMm }) => fromDatumMm),
+    drawn: datum.meets !== 'bench-end' && datum.toSeamMm <= DRAWN_WITHIN_MM,
+  };
+}
+
+function seamName({ meets, side }: CushionDatum): string {
+  if (meets === 'bench-end') return `sitter’s ${side}`;
+  return meets === 'end-wall' ? 'end-wall' : `${meets}-end`;
+}
+
+function edgeWords({ kind, edges }: CushionSpec): SpecCushion['edges'] {
+  return {
+    back: kind === 'seat' ? 'back edge' : 'top edge',
+    front: kind === 'seat' ? 'front edge' : 'bottom edge',
+    left: `${endWords(edges.right)}, sitter’s right`,
+    right: `${endWords(edges.left)}, sitter’s left`,
+  };
+}
+
+const endWords = (edge: EdgeMeets): string => (edge === 'free' ? 'free end' : MEETS[edge]);
+
+function meetsWords({ kind, edges }: CushionSpec): string {
+  const free = (edge: EdgeMeets) => (edge === 'front' || edge === 'top' ? 'free' : MEETS[edge]);
+  const [back, front] = kind === 'seat' ? ['back', 'front'] : ['top', 'bottom'];
+  return (
+    `Sitter’s left: ${MEETS[edges.left]} · right: ${MEETS[edges.right]} · ` +
+    `${back}: ${free(edges.back)} · ${front}: ${free(edges.front)}`
+  );
+}
