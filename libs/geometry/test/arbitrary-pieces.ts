@@ -37,8 +37,8 @@ export const anyBench: fc.Arbitrary<PieceOf<'bench'>> = fc
     return {
       ...start,
       ...sizes,
-      ends: sizes.ends as PieceOf<'bench'>['ends'],
-      base: sizes.base as 'box' | 'open',
+      ends: sizes.ends,
+      base: sizes.base,
       seatCushion: { ...start.seatCushion, thicknessMm: seatPad },
       backCushion: { ...start.backCushion, thicknessMm: backPad },
       upholstery: { ...start.upholstery, longestCushionMm },

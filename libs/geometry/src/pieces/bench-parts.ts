@@ -1,3 +1,4 @@
+import { cushionRuns } from '../cushions/cushion-runs.ts';
 import { boardRun } from '../parts/boards.ts';
 import { partList, type PartList } from '../parts/part-list.ts';
 import type { Part } from '../parts/part.ts';
@@ -73,16 +74,26 @@ function back(list: PartList, bench: PieceOf<'bench'>, layout: BenchLayout): voi
 }
 
 function cushions(list: PartList, bench: PieceOf<'bench'>, layout: BenchLayout): void {
-  const { tiltRad, leanRad, cushionLeftMm, cushionRightMm, faceZMm } = layout;
-  const run = cushionRightMm - cushionLeftMm;
-  const count = Math.max(1, Math.ceil(run / bench.upholstery.longestCushionMm - 1e-9));
-  const width = run / count;
+  const { tiltRad, leanRad, faceZMm } = layout;
   const seat = bench.seatCushion.thicknessMm;
   const slope = bench.seatDepthMm / Math.cos(tiltRad);
   const pad = bench.backCushion.thicknessMm;
   const rise = (layout.backTopMm - layout.seatTopRearMm) / Math.cos(leanRad);
-  for (let i = 0; i < count; i += 1) {
-    const x = cushionLeftMm + (i + 0.5) * width;
+  for (const { kind, leftMm, rightMm } of cushionRuns(bench)) {
+    const width = rightMm - leftMm;
+    const x = (leftMm + rightMm) / 2;
+    if (kind === 'back') {
+      list.box('back-cushion', 'cloth', {
+        sizeMm: [width, rise, pad],
+        centreMm: [
+          x,
+          layout.seatTopRearMm + (rise / 2) * Math.cos(leanRad) - (pad / 2) * Math.sin(leanRad),
+          faceZMm - (rise / 2) * Math.sin(leanRad) - (pad / 2) * Math.cos(leanRad),
+        ],
+        pitchRad: -leanRad,
+      });
+      continue;
+    }
     list.box('seat-cushion', 'cloth', {
       sizeMm: [width, seat, slope],
       centreMm: [
@@ -91,16 +102,6 @@ function cushions(list: PartList, bench: PieceOf<'bench'>, layout: BenchLayout):
         layout.frontZMm - (slope / 2) * Math.cos(tiltRad) + (seat / 2) * Math.sin(tiltRad),
       ],
       pitchRad: -tiltRad,
-    });
-    if (!layout.hasBack) continue;
-    list.box('back-cushion', 'cloth', {
-      sizeMm: [width, rise, pad],
-      centreMm: [
-        x,
-        layout.seatTopRearMm + (rise / 2) * Math.cos(leanRad) - (pad / 2) * Math.sin(leanRad),
-        faceZMm - (rise / 2) * Math.sin(leanRad) - (pad / 2) * Math.cos(leanRad),
-      ],
-      pitchRad: -leanRad,
     });
   }
 }

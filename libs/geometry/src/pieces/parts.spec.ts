@@ -37,9 +37,9 @@ describe('parts of a piece', () => {
           }
         });
       }),
-      { numRuns: 150 },
+      { numRuns: 100 },
     );
-  });
+  }, 30_000);
 
   it('stay inside the envelope of the piece and above the floor', () => {
     fc.assert(
@@ -56,9 +56,9 @@ describe('parts of a piece', () => {
           }
         }
       }),
-      { numRuns: 300 },
+      { numRuns: 200 },
     );
-  });
+  }, 30_000);
 
   it('have a positive volume and ids that do not repeat', () => {
     fc.assert(

@@ -7,7 +7,10 @@ import { footprint } from './footprint.ts';
 
 /** A piece that is nearer than this to a line jumps to it, millimetres. */
 const SNAP_MM = 60;
-const SNAP_TURN_DEG = 8;
+/** Turns this near to square with a neighbour become square. */
+const SQUARE_DEG = 8;
+/** Turns this near to a multiple of 15° take it. */
+const STEP_TURN_DEG = 2.5;
 /** Only pieces this near are looked at, millimetres. */
 const NEARBY_MM = 600;
 /** A table snaps over the seat of a bench by 1 1/2 in as well as edge to edge. */
@@ -70,11 +73,10 @@ export function snapPiece(document: SetDocument, pieceId: string, wanted: Piece[
 function snappedTurn(wanted: Piece['at'], others: Piece[]): number {
   const near = [...others].sort((a, b) => away(a, wanted) - away(b, wanted)).slice(0, 3);
   const quarters = near.flatMap(({ at }) => [0, 90, 180, 270].map((quarter) => at.turnDeg + quarter));
-  const steps = [Math.round(wanted.turnDeg / WHOLE_TURNS_DEG) * WHOLE_TURNS_DEG];
+  const step = Math.round(wanted.turnDeg / WHOLE_TURNS_DEG) * WHOLE_TURNS_DEG;
   const off = (turn: number) => Math.abs(normalTurnDeg(turn - wanted.turnDeg));
-  const [best] = [...quarters, ...steps]
-    .filter((turn) => off(turn) <= SNAP_TURN_DEG)
-    .sort((a, b) => off(a) - off(b));
+  const square = quarters.filter((turn) => off(turn) <= SQUARE_DEG).sort((a, b) => off(a) - off(b));
+  const best = square[0] ?? (off(step) <= STEP_TURN_DEG ? step : undefined);
   return normalTurnDeg(best ?? wanted.turnDeg);
 }
 

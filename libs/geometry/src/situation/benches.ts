@@ -3,7 +3,7 @@ import { normalTurnDeg, toPiece } from '../parts/placement.ts';
 import { benchLayout } from '../pieces/bench-layout.ts';
 import { insideCorners } from '../pieces/corners.ts';
 import type { PieceOf } from '../room/document.ts';
-import { area, clipped, extent, inFrame, type PlanOutline } from './plan.ts';
+import { area, clipped, clippedLine, extent, inFrame, type PlanOutline } from './plan.ts';
 import { planOfPiece, rectangleOf, solidsNear, type Survey, type SurveyedPlace } from './survey.ts';
 
 type Bench = PieceOf<'bench'>;
@@ -12,6 +12,8 @@ type Bench = PieceOf<'bench'>;
 const OPPOSED_WITHIN_DEG = 15;
 /** Benches further apart share no knee space, millimetres. */
 const FACING_GAP_MM = 2500;
+/** Strips that share less than this do not overlap, millimetres. */
+const SHARED_MM = 1;
 const TO_WALL_MM = 30;
 const PARALLEL_WITHIN_DEG = 3;
 const BLOCKED_FROM_MM2 = 1000;
@@ -107,11 +109,11 @@ function facing(found: Survey, bench: Bench, other: Bench): FacingSituation | un
   const half = other.lengthMm / 2;
   const own = planOfPiece(bench);
   const line = inFrame(rectangleOf(other, [-half, half], [otherFront, otherFront]), own);
-  const shared = clipped(line, { left: [-bench.lengthMm / 2, bench.lengthMm / 2] });
+  const shared = clippedLine(line, { left: [-bench.lengthMm / 2, bench.lengthMm / 2] });
   if (shared.length === 0) return undefined;
   const [left, right] = extent(shared, 0);
   const gapMm = extent(shared, 1)[0] - front;
-  if (right - left <= 0 || gapMm <= 0 || gapMm > FACING_GAP_MM) return undefined;
+  if (right - left < SHARED_MM || gapMm <= 0 || gapMm > FACING_GAP_MM) return undefined;
   const between = { left: [left, right] as const, ahead: [front + 1, front + gapMm - 1] as const };
   const blocking = solidsNear(
     found,
@@ -154,7 +156,7 @@ function wallBehind(
     const wall = inFrame(rear, planOfPiece(piece));
     const [near, far] = extent(wall, 1);
     if (near < -TO_WALL_MM || far > TO_WALL_MM) continue;
-    const beside = clipped(wall, { left: [-piece.lengthMm / 2, piece.lengthMm / 2] });
+    const beside = clippedLine(wall, { left: [-piece.lengthMm / 2, piece.lengthMm / 2] });
     if (beside.length === 0) continue;
     const [left, right] = extent(beside, 0);
     if (right - left < bench.lengthMm / 2) continue;

@@ -2,6 +2,8 @@ import type { OverheadSituation, SillSituation } from '@settlewright/anthropomet
 import { clipped, extent, type PlanOutline } from './plan.ts';
 import { solidsNear, type Survey, type SurveyedPlace } from './survey.ts';
 
+/** Sills wholly further from the seat front than this belong to nobody here, millimetres. */
+const SILL_REACH_LIMIT_MM = 3000;
 /** Before the back, the stretch in which an elbow looks for a sill, millimetres. */
 const ELBOW_STRETCH_MM = 330;
 /** A sill this far behind the face of the back is still behind the sitter. */
@@ -28,7 +30,11 @@ export function sillsBeside(found: Survey, place: SurveyedPlace, reachMm: number
   const sills: SillSituation[] = [];
   for (const { piece } of found.pieces) {
     if (piece.kind !== 'sill') continue;
-    const boards = solidsNear(found, place.plan, 3000, (one) => one.id === piece.id).filter(
+    const boards = solidsNear(
+      found,
+      place.plan,
+      SILL_REACH_LIMIT_MM,
+      (one) => one.id === piece.id,
       (solid) => solid.role === 'sill-board',
     );
     const named = {
@@ -63,12 +69,15 @@ export function sillsBeside(found: Survey, place: SurveyedPlace, reachMm: number
 export function wallsBeside(found: Survey, place: SurveyedPlace): { left?: number; right?: number } {
   const seat = place.frame.hipMm[1];
   const walls: { left?: number; right?: number } = {};
-  const near = solidsNear(found, place.plan, WALL_REACH_MM + place.effectiveDepthMm, (piece) =>
-    ['bulkhead', 'bench', 'sill'].includes(piece.kind),
+  const near = solidsNear(
+    found,
+    place.plan,
+    WALL_REACH_MM + place.effectiveDepthMm,
+    (piece) => piece.kind === 'bulkhead' || piece.kind === 'bench' || piece.kind === 'sill',
+    ({ role, bottomMm, topMm }) =>
+      WALL_ROLES.includes(role) && topMm > seat + ELBOW_BAND_MM[0] && bottomMm < seat + ELBOW_BAND_MM[1],
   );
-  for (const { role, bottomMm, topMm, outline } of near) {
-    if (!WALL_ROLES.includes(role)) continue;
-    if (topMm <= seat + ELBOW_BAND_MM[0] || bottomMm >= seat + ELBOW_BAND_MM[1]) continue;
+  for (const { outline } of near) {
     const beside = sideOf(clipped(outline, { ahead: [-place.effectiveDepthMm, 0] }));
     if (beside === undefined || beside.distanceMm > WALL_REACH_MM) continue;
     walls[beside.side] = Math.min(walls[beside.side] ?? Infinity, beside.distanceMm);

@@ -28,10 +28,10 @@ const STRIP: readonly [number, number] = [-LAP_STRIP_MM / 2, LAP_STRIP_MM / 2];
 export function lapTable(found: Survey, place: SurveyedPlace): PlaceTableSituation | undefined {
   const lap = { left: STRIP, ahead: [-place.effectiveDepthMm, LAP_AHEAD_MM] as const };
   let best: { table: PieceOf<'table'>; cover: number } | undefined;
-  for (const { piece, centre, radiusMm } of found.pieces) {
+  for (const { piece, circle } of found.pieces) {
     if (piece.kind !== 'table' || piece.heightMm <= place.frame.hipMm[1]) continue;
-    const away = Math.hypot(centre[0] - place.plan.xMm, centre[1] - place.plan.zMm);
-    if (away > radiusMm + place.effectiveDepthMm + LAP_STRIP_MM + LAP_AHEAD_MM) continue;
+    const away = Math.hypot(circle[0] - place.plan.xMm, circle[1] - place.plan.zMm);
+    if (away > circle[2] + place.effectiveDepthMm + LAP_STRIP_MM + LAP_AHEAD_MM) continue;
     const cover = area(clipped(inFrame(topOf(piece), place.plan), lap));
     if (cover > SMALLEST_COVER_MM2 && cover > (best?.cover ?? 0)) best = { table: piece, cover };
   }
@@ -52,6 +52,7 @@ function measured(found: Survey, place: SurveyedPlace, table: PieceOf<'table'>):
     place.plan,
     LEG_REACH_MM + place.effectiveDepthMm,
     (piece) => piece.id !== place.piece.id && STANDING.includes(piece.kind),
+    (solid) => solid.bottomMm < table.heightMm,
   );
   const hanging = near.filter(
     (solid) => solid.pieceId === table.id && ['top', 'edge-lip', 'apron'].includes(solid.role),
@@ -85,8 +86,6 @@ function depthTo(
     if (bottomMm >= high - 1e-6 || topMm <= low + 1e-6) continue;
     const inTheWay = clipped(outline, { left: STRIP, ahead: [edge, edge + LEG_REACH_MM] });
     if (inTheWay.length === 0) continue;
-    const [u0, u1] = extent(inTheWay, 0);
-    if (u1 - u0 < 1e-6) continue;
     nearest = Math.min(nearest, extent(inTheWay, 1)[0] - edge);
   }
   return nearest === Infinity ? undefined : nearest;

@@ -13,6 +13,8 @@ export interface PlanSolid {
   bottomMm: number;
   topMm: number;
   outline: PlanOutline;
+  /** Circle around the outline, in the room: x, z and radius. */
+  circle: readonly [number, number, number];
 }
 
 const CIRCLE_SIDES = 32;
@@ -41,13 +43,27 @@ export function planSolid(part: Part): PlanSolid {
       const angle = (2 * Math.PI * i) / CIRCLE_SIDES;
       return place(solid.radiusMm * Math.cos(angle), solid.radiusMm * Math.sin(angle));
     });
-    return { ...named, bottomMm: py - solid.heightMm / 2, topMm: py + solid.heightMm / 2, outline };
+    return {
+      ...named,
+      bottomMm: py - solid.heightMm / 2,
+      topMm: py + solid.heightMm / 2,
+      outline,
+      circle: [px, pz, solid.radiusMm],
+    };
   }
   if (solid.shape === 'prism') {
     const xs = solid.outlineMm.map(([x]) => x);
     const ys = solid.outlineMm.map(([, y]) => y);
-    const outline = rectangle(Math.min(...xs), Math.max(...xs), -solid.depthMm / 2, solid.depthMm / 2);
-    return { ...named, bottomMm: py + Math.min(...ys), topMm: py + Math.max(...ys), outline };
+    const [x0, x1] = [Math.min(...xs), Math.max(...xs)];
+    const outline = rectangle(x0, x1, -solid.depthMm / 2, solid.depthMm / 2);
+    const [cx, cz] = place((x0 + x1) / 2, 0);
+    return {
+      ...named,
+      bottomMm: py + Math.min(...ys),
+      topMm: py + Math.max(...ys),
+      outline,
+      circle: [cx, cz, Math.hypot(x1 - x0, solid.depthMm) / 2],
+    };
   }
   const [w, h, d] = solid.sizeMm;
   const [cp, sp] = [Math.abs(Math.cos(pitch)), Math.abs(Math.sin(pitch))];
@@ -58,6 +74,7 @@ export function planSolid(part: Part): PlanSolid {
     bottomMm: py - halfY,
     topMm: py + halfY,
     outline: rectangle(-w / 2, w / 2, -halfZ, halfZ),
+    circle: [px, pz, Math.hypot(w / 2, halfZ)],
   };
 }
 
@@ -89,14 +106,32 @@ export interface PlanWindow {
   ahead?: readonly [number, number];
 }
 
+/** What shares less than this with a window only touches it, millimetres. */
+const TOUCHING_MM = 1e-6;
+
 /**
  * The part of a convex outline inside a window.
  *
  * @param outline - convex, in the frame of the window
  * @param window - limits along the first axis (`left`) and the second (`ahead`)
- * @returns the outline cut to the window; empty when they do not meet
+ * @returns the outline cut to the window; empty when they do not meet or only touch
  */
 export function clipped(outline: PlanOutline, window: PlanWindow): PlanOutline {
+  const rest = clippedLine(outline, window);
+  if (rest.length < 3) return [];
+  const [x0, x1] = extent(rest, 0);
+  const [z0, z1] = extent(rest, 1);
+  return x1 - x0 < TOUCHING_MM || z1 - z0 < TOUCHING_MM ? [] : rest;
+}
+
+/**
+ * The part of a line, or of an outline without width, inside a window.
+ *
+ * @param outline - convex, in the frame of the window
+ * @param window - limits along the first axis (`left`) and the second (`ahead`)
+ * @returns the line cut to the window; empty when they do not meet
+ */
+export function clippedLine(outline: PlanOutline, window: PlanWindow): PlanOutline {
   let rest = outline;
   for (const [axis, limits] of [
     [0, window.left],

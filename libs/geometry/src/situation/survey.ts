@@ -2,15 +2,14 @@ import { benchLayout } from '../pieces/bench-layout.ts';
 import { derivePieceParts } from '../pieces/kinds.ts';
 import { placeFrames, type PlaceFrame } from '../pieces/place-frames.ts';
 import type { Piece, PieceOf, SetDocument } from '../room/document.ts';
-import { extent, inFrame, planSolid, type PlanFrame, type PlanOutline, type PlanSolid } from './plan.ts';
+import { inFrame, planSolid, type PlanFrame, type PlanOutline, type PlanSolid } from './plan.ts';
 
 /** A piece with its parts as clearances see them. */
 export interface SurveyedPiece {
   piece: Piece;
   solids: PlanSolid[];
   /** Circle around the outlines of all parts. */
-  centre: readonly [number, number];
-  radiusMm: number;
+  circle: PlanSolid['circle'];
 }
 
 /** A place as clearances see it: origin at the seat front, second axis ahead of the sitter. */
@@ -39,7 +38,7 @@ export interface Survey {
 export function survey(document: SetDocument): Survey {
   const pieces = document.pieces.map((piece) => {
     const solids = derivePieceParts(piece, document).map(planSolid);
-    return { piece, solids, ...circle(solids, piece) };
+    return { piece, solids, circle: circleAround(solids, piece) };
   });
   const places = document.pieces.flatMap((piece) =>
     piece.kind === 'bench' || piece.kind === 'loose-seat'
@@ -54,8 +53,9 @@ export function survey(document: SetDocument): Survey {
  *
  * @param found - the survey
  * @param plan - the frame
- * @param reachMm - pieces whose parts all lie further from the frame's origin are left out
+ * @param reachMm - what lies wholly further from the frame's origin is left out
  * @param wanted - which pieces to look at
+ * @param kept - which of their solids to look at
  * @returns solids with their outline in the frame
  */
 export function solidsNear(
@@ -63,12 +63,16 @@ export function solidsNear(
   plan: PlanFrame,
   reachMm: number,
   wanted: (piece: Piece) => boolean,
+  kept: (solid: PlanSolid) => boolean = () => true,
 ): PlanSolid[] {
   const near: PlanSolid[] = [];
-  for (const { piece, solids, centre, radiusMm } of found.pieces) {
-    if (!wanted(piece)) continue;
-    if (Math.hypot(centre[0] - plan.xMm, centre[1] - plan.zMm) > reachMm + radiusMm) continue;
-    for (const solid of solids) near.push({ ...solid, outline: inFrame(solid.outline, plan) });
+  const isNear = ([x, z, radius]: PlanSolid['circle']) =>
+    Math.hypot(x - plan.xMm, z - plan.zMm) <= reachMm + radius;
+  for (const { piece, solids, circle } of found.pieces) {
+    if (!wanted(piece) || !isNear(circle)) continue;
+    for (const solid of solids) {
+      if (kept(solid) && isNear(solid.circle)) near.push({ ...solid, outline: inFrame(solid.outline, plan) });
+    }
   }
   return near;
 }
@@ -115,10 +119,15 @@ function surveyedPlace(frame: PlaceFrame, piece: SurveyedPlace['piece']): Survey
   return { frame, piece, plan, effectiveDepthMm, hipBehindFrontMm };
 }
 
-function circle(solids: PlanSolid[], piece: Piece): { centre: readonly [number, number]; radiusMm: number } {
-  if (solids.length === 0) return { centre: [piece.at.xMm, piece.at.zMm], radiusMm: 0 };
-  const all = solids.flatMap((solid) => solid.outline);
-  const [x0, x1] = extent(all, 0);
-  const [z0, z1] = extent(all, 1);
-  return { centre: [(x0 + x1) / 2, (z0 + z1) / 2], radiusMm: Math.hypot(x1 - x0, z1 - z0) / 2 };
+function circleAround(solids: PlanSolid[], piece: Piece): PlanSolid['circle'] {
+  let [x0, x1, z0, z1] = [Infinity, -Infinity, Infinity, -Infinity];
+  for (const { circle } of solids) {
+    const [x, z, radius] = circle;
+    x0 = Math.min(x0, x - radius);
+    x1 = Math.max(x1, x + radius);
+    z0 = Math.min(z0, z - radius);
+    z1 = Math.max(z1, z + radius);
+  }
+  if (x1 < x0) return [piece.at.xMm, piece.at.zMm, 0];
+  return [(x0 + x1) / 2, (z0 + z1) / 2, Math.hypot(x1 - x0, z1 - z0) / 2];
 }

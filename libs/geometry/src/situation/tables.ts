@@ -60,6 +60,9 @@ export function tableSituations(found: Survey, places: PlaceSituation[]): TableS
       mark: table.mark,
       topMm: table.heightMm,
       accessible: table.accessible,
+      ...betweenFacing(table, (name) =>
+        edges.some((one) => one.edge.name === name && one.placeIds.length > 0),
+      ),
       edges: edges
         .filter(({ placeIds }) => placeIds.length > 0)
         .map(({ edge, placeIds }) => ({
@@ -71,6 +74,14 @@ export function tableSituations(found: Survey, places: PlaceSituation[]): TableS
       kneeSpace: kneeSpace(found, table, open),
     };
   });
+}
+
+/** Width of the top between diners who face each other across it. */
+function betweenFacing(table: Table, isTaken: (name: EdgeName) => boolean): { betweenFacingMm?: number } {
+  const widths: number[] = [];
+  if (isTaken('front') && isTaken('back')) widths.push(table.widthMm);
+  if (isTaken('left') && isTaken('right')) widths.push(table.lengthMm);
+  return widths.length > 0 ? { betweenFacingMm: Math.min(...widths) } : {};
 }
 
 function edgeOf(table: Table, { name, turnRad }: typeof FRONT): Edge {
