@@ -80,7 +80,7 @@ const bench = z.strictObject({
     z.strictObject({ by: z.literal('width'), widthMm: length(300, 1500) }),
   ]),
   upholstery: z.strictObject({
-    /** A run longer than this is split into equal cushions. */
+    /** A run longer than this is split near equal parts, on board joints where one is close. */
     longestCushionMm: length(300, 3000),
     buttons: z.strictObject({
       rows: z.number().int().min(0).max(8),
