@@ -88,6 +88,12 @@ describe('revisions and fit sheets', () => {
     expect(answers.map(({ body }) => body.letter).sort()).toEqual(['A', 'B', 'C']);
   });
 
+  it.each(['B', 'a1', '%00', "A'--", 'A'.repeat(500)])('has no revision %.10s', async (letter) => {
+    await issue().expect(201);
+    await owner().get(`${place.setPath}/revisions/${letter}`).expect(404);
+    await owner().get(`${place.setPath}/revisions/${letter}/fit-sheet.csv`).expect(404);
+  });
+
   it('stays as it is when people are measured anew', async () => {
     await issue().expect(201);
     const before = (await owner().get(`${place.setPath}/revisions/A`)).body.fitSheet;
@@ -319,6 +325,31 @@ describe('revisions and fit sheets', () => {
       ]);
       expect(dump).toContain('cast.erased');
       for (const told of ['Ottilie', '393.25', '241.75']) expect(dump).not.toContain(told);
+    });
+
+    it('leaves nothing behind in a revision that is issued meanwhile', async () => {
+      await Promise.all([issue(), owner().delete(`${place.path}/cast/${castId}`), issue()]);
+      const kept = await test.dataSource.query('SELECT fit_sheet FROM set_revisions WHERE set_id = $1', [
+        place.setId,
+      ]);
+      expect(kept).toHaveLength(2);
+      expect(JSON.stringify(kept)).not.toMatch(/Ottilie|393\.25/);
+    });
+
+    it('cannot be undone by a change that was under way', async () => {
+      await Promise.all([
+        owner().patch(`${place.path}/cast/${castId}`).send({ notes: 'late' }),
+        owner().delete(`${place.path}/cast/${castId}`),
+        owner().patch(`${place.path}/cast/${castId}`).send({ weightKg: 61.5 }),
+        owner().delete(`${place.path}/cast/${castId}`),
+      ]);
+      const [person] = await test.dataSource.query('SELECT * FROM cast_members WHERE id = $1', [castId]);
+      expect(person).toMatchObject({
+        name: 'removed sitter 1',
+        weight_kg: null,
+        notes: '',
+        removed_number: 1,
+      });
     });
 
     it('numbers the removed and lets them go when nobody seats them', async () => {

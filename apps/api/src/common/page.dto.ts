@@ -2,6 +2,7 @@ import type { Type } from '@nestjs/common';
 import { ApiProperty, ApiPropertyOptional } from '@nestjs/swagger';
 import { Type as AsType } from 'class-transformer';
 import { IsIn, IsInt, IsOptional, IsString, Max, MaxLength, Min } from 'class-validator';
+import { TextField } from './text-field';
 
 export class PageQuery {
   @ApiPropertyOptional({ default: 1, minimum: 1 })
@@ -33,8 +34,7 @@ export class PageQuery {
 
   @ApiPropertyOptional()
   @IsOptional()
-  @IsString()
-  @MaxLength(200)
+  @TextField({ max: 200 })
   search?: string;
 }
 

@@ -19,6 +19,8 @@ import { revisionLetter } from './letters';
 import { SeatedPeople } from './seated-people.service';
 import { SetAccess } from './set-access';
 
+const LETTERS = /^[A-Z]{1,6}$/i;
+
 @Injectable()
 export class RevisionsService {
   constructor(
@@ -94,10 +96,12 @@ export class RevisionsService {
   /** One revision by its letter. */
   async find(member: MemberInfo, productionId: string, setId: string, letter: string): Promise<SetRevision> {
     await this.access.forReading(member, productionId, setId);
-    const revision = await this.revisions.findOne({
-      where: { setId, letter: letter.toUpperCase() },
-      relations: { issuedBy: true },
-    });
+    const revision = LETTERS.test(letter)
+      ? await this.revisions.findOne({
+          where: { setId, letter: letter.toUpperCase() },
+          relations: { issuedBy: true },
+        })
+      : null;
     if (!revision) throw Problem.notFound('revision');
     return revision;
   }
