@@ -2,7 +2,7 @@ import type { CookieOptions, Request, Response } from 'express';
 import type { Settings } from '../config/settings';
 import { SESSION_DAYS } from './sessions.service';
 
-export const REFRESH_COOKIE = 'settlewright_refresh';
+const REFRESH_COOKIE = 'settlewright_refresh';
 
 const options = (config: Settings): CookieOptions => ({
   httpOnly: true,

@@ -11,7 +11,7 @@ import type { AccessTokenPayload } from './jwt.strategy';
 export const ACCESS_SECONDS = 10 * 60;
 export const SESSION_DAYS = 30;
 /** two tabs may refresh with the same cookie at nearly the same time */
-export const OVERLAP_MS = 10_000;
+const OVERLAP_MS = 10_000;
 
 export interface IssuedTokens {
   userId: string;

@@ -6,7 +6,7 @@ export const ROLES = ['owner', 'designer', 'carpenter', 'reviewer'] as const;
 export type Role = (typeof ROLES)[number];
 
 /** `link`: whoever holds the private link; the route's service reads the token. */
-export type OpenRule = 'public' | 'signed-in' | 'link';
+type OpenRule = 'public' | 'signed-in' | 'link';
 export type AccessRule = readonly [OpenRule] | readonly [Role, ...Role[]];
 
 export const ACCESS_RULE = 'access-rule';

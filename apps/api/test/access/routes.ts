@@ -3,7 +3,7 @@ import { createOpenApi } from '../../src/openapi';
 import type { TestApp } from '../test-app';
 
 const METHODS = ['get', 'post', 'put', 'patch', 'delete'] as const;
-export type Method = (typeof METHODS)[number];
+type Method = (typeof METHODS)[number];
 
 export interface Route {
   /** as in `EXPECTED_ACCESS`: `GET /health` */
