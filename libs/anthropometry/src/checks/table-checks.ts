@@ -1,4 +1,5 @@
-import { fixed, minus, ofBody, times, type Amount } from './amount.ts';
+import { best, fixed, minus, ofBody, times, type Amount } from './amount.ts';
+import type { LedgerLine } from './fit-sheet.ts';
 import {
   clothingOf,
   measureEntry,
@@ -195,23 +196,52 @@ export const kneeDepth: PersonCheck = {
  */
 export const footDepth: PersonCheck = {
   id: 'TABLE-04',
-  ask: (asked) =>
-    depthAnswer(asked, 'foot', fixedSide(ruleNumber(asked.rule, 'pass'), ruleNumber(asked.rule, 'fail'))),
+  ask: (asked) => depthAnswer(asked, 'foot', footSide(asked), stretchLedger(asked)),
+  askPublic: (asked) => depthAnswer(asked, 'foot', footSide(asked)),
 };
 
-function depthAnswer(asked: Asked, level: 'knee' | 'foot', lower: Side): Said {
+const footSide = ({ rule }: Asked): Side => fixedSide(ruleNumber(rule, 'pass'), ruleNumber(rule, 'fail'));
+
+/** For information: how far before the table edge the legs end when stretched right out. */
+const stretchLedger = (asked: Asked) => (): LedgerLine[] => {
+  const { body, rule } = asked;
+  const thigh = body.mean('buttock_popliteal_length');
+  const shank = body.mean('popliteal_height') + body.person.shoeMm;
+  const foot = body.mean('foot_length') + ruleNumber(rule, 'shoeLength');
+  const stretch = fullLegStretchMm(thigh, shank, foot, best(pressedSeat(asked, 'front').height));
+  if (stretch === undefined) return [];
+  return ledgerOf(
+    [
+      measureEntry(body, 'buttock_popliteal_length'),
+      ['shin stretched forward', fixed(stretch - thigh - foot)],
+      ['foot in its shoe', fixed(foot)],
+      ['less the belly', ofBody(body, 'abdominal_extension_depth_sitting', -1)],
+    ],
+    'legs stretched right out, from the table edge',
+  );
+};
+
+function depthAnswer(
+  asked: Asked,
+  level: 'knee' | 'foot',
+  lower: Side,
+  before: () => LedgerLine[] = () => [],
+): Said {
   const { table } = asked.place;
   if (!table) return NO_TABLE;
   const depthMm = level === 'knee' ? table.kneeDepthMm : table.footDepthMm;
-  if (depthMm === undefined)
+  if (depthMm === undefined) {
     return { reason: `nothing in the way of the ${level === 'knee' ? 'knees' : 'feet'}` };
+  }
   return [
     answerOf(
       table,
       question({
         value: fixed(depthMm),
-        setLedger: () =>
-          ledgerOf([[`edge of ${table.mark} to the obstruction`, fixed(depthMm)]], `${level} depth`),
+        setLedger: () => [
+          ...before(),
+          ...ledgerOf([[`edge of ${table.mark} to the obstruction`, fixed(depthMm)]], `${level} depth`),
+        ],
         lower,
       }),
     ),

@@ -315,6 +315,26 @@ describe('worked examples of the rules', () => {
       verdictOf(personCell('TABLE-04', place({ table: lapTable({ footDepthMm }) }), person())).verdict;
     expect([at(600), at(500), at(429)]).toEqual(['fits', 'tight', 'wontFit']);
   });
+
+  it('TABLE-04: tells where stretched legs end, unless the feet do not reach', () => {
+    const measured = {
+      buttock_popliteal_length: 550,
+      popliteal_height: 490,
+      foot_length: 285,
+      abdominal_extension_depth_sitting: 220,
+    };
+    const totals = (seat: number) =>
+      verdictOf(
+        personCell(
+          'TABLE-04',
+          place({ seatTopFrontMm: seat, table: lapTable({ footDepthMm: 700 }) }),
+          person({ measured }),
+        ),
+      ).setLedger.filter(({ kind }) => kind === 'total');
+    expect(totals(400)[0]).toMatchObject({ label: 'legs stretched right out, from the table edge' });
+    expect(totals(400)[0]?.value).toBeCloseTo(969.4, 1);
+    expect(totals(520)).toHaveLength(1);
+  });
 });
 
 describe('code clauses', () => {

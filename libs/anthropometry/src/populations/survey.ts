@@ -5,7 +5,7 @@ import { MEASURE_KEYS, type MeasureKey } from '../measures/measures.ts';
 export type SurveyGroup = 'women' | 'men';
 
 /** Mean, spread and percentiles of one measure in one group. */
-export interface MeasureStatistics {
+interface MeasureStatistics {
   mean: number;
   sd: number;
   /** Values at `Survey.percentileKeys`, never falling. */
