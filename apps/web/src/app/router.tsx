@@ -28,6 +28,7 @@ export const router = createBrowserRouter([
           { path: '/invitation/:token', lazy: () => import('@/routes/invitation.tsx') },
         ],
       },
+      { path: '/order/:token', lazy: () => import('@/routes/upholsterer.tsx') },
       {
         Component: Shell,
         ErrorBoundary: ErrorPage,
@@ -53,6 +54,7 @@ export const router = createBrowserRouter([
                           { index: true, lazy: () => import('@/routes/production.tsx') },
                           { path: 'people', lazy: () => import('@/routes/people.tsx') },
                           { path: 'sets/:setId', lazy: () => import('@/routes/room.tsx') },
+                          { path: 'orders/:orderId', lazy: () => import('@/routes/order.tsx') },
                           { path: 'sets/:setId/revisions', lazy: () => import('@/routes/revisions.tsx') },
                         ],
                       },

@@ -1,5 +1,6 @@
 import { useCallback } from 'react';
 import { useCast } from '@/features/cast/api.ts';
+import { NewOrderButton } from '@/features/cushion-orders/index.ts';
 import { PeopleSummary } from '@/features/cast/components/people-summary.tsx';
 import { ProductionPage } from '@/features/productions/components/production-page.tsx';
 import type { ColourOf } from '@/features/productions/components/sets.tsx';
@@ -21,5 +22,15 @@ export function Component() {
     },
     [people],
   );
-  return <ProductionPage colourOf={colourOf} people={<PeopleSummary />} />;
+  return (
+    <ProductionPage
+      colourOf={colourOf}
+      people={<PeopleSummary />}
+      orderAction={
+        workshop.canEdit ? (
+          <NewOrderButton workshopId={workshop.id} productionId={production.id} />
+        ) : undefined
+      }
+    />
+  );
 }

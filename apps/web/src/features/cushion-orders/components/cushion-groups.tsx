@@ -1,0 +1,148 @@
+import { cushionDrawing, groupCushions, type CushionGroup, type CushionSpec } from '@settlewright/geometry';
+import { useMemo, type ReactNode } from 'react';
+import { MarkTag } from '@/components/mark-tag.tsx';
+import { Measure } from '@/components/measure.tsx';
+import { useFormat } from '@/lib/format.ts';
+import type { OrderSpec } from '../order.ts';
+import { CushionDrawing } from './cushion-drawing.tsx';
+
+const HAND_WORDS: Record<CushionSpec['hand'], string> = {
+  left: 'left hand as sat in',
+  right: 'right hand as sat in',
+  either: 'either hand',
+};
+
+/** Three sizes in a row, the unit once at the end. */
+function Sizes({ size }: { size: CushionSpec['finishedMm'] }) {
+  const format = useFormat();
+  const [width, depth, thickness] = [size.widthMm, size.depthMm, size.thicknessMm].map((mm) =>
+    format.length(mm),
+  );
+  const bare = (text = '') => text.replace(/″$|[  ]?mm$/u, '');
+  return (
+    <>
+      <Measure text={bare(width)} />
+      <span className="px-1.5 text-base text-ink-3">×</span>
+      <Measure text={bare(depth)} />
+      <span className="px-1.5 text-base text-ink-3">×</span>
+      <Measure text={thickness ?? ''} />
+    </>
+  );
+}
+
+function Row({ name, children }: { name: string; children: ReactNode }) {
+  return (
+    <div className="grid grid-cols-[5.5rem_1fr] gap-3 border-b border-rule py-2">
+      <dt className="text-sm text-ink-2">{name}</dt>
+      <dd className="text-sm font-medium break-words">{children}</dd>
+    </div>
+  );
+}
+
+function Facts({ spec, words }: { spec: CushionSpec; words: OrderSpec }) {
+  const format = useFormat();
+  const { cut, foam, buttons } = spec;
+  const show = (mm: number) => <Measure text={format.length(mm)} />;
+  return (
+    <dl>
+      <Row name="Place">
+        {show(spec.placeMm.widthMm)} × {show(spec.placeMm.depthMm)}, wood to wood
+      </Row>
+      <Row name="Foam">
+        {show(cut.foamMm.widthMm)} × {show(cut.foamMm.depthMm)} × {show(cut.foamMm.thicknessMm)}, {foam.grade}
+        , {(foam.densityKgM3 / 16.018463).toFixed(1)} lb/ft³, firmness {Math.round(foam.ifd25N / 4.4482216)}{' '}
+        lb (25 % IFD)
+        {words.foam !== '' && `; ${words.foam}`}
+      </Row>
+      <Row name="Cloth cut">
+        {cut.plates.count} plates {show(cut.plates.widthMm)} × {show(cut.plates.depthMm)}, boxing{' '}
+        {show(cut.boxing.cutHeightMm)} × {show(cut.boxing.cutLengthMm)}
+      </Row>
+      {words.cover !== '' && <Row name="Cover">{words.cover}</Row>}
+      <Row name="Welt">
+        {show(cut.welt.lengthMm)} for {cut.welt.seams} seams{words.welt !== '' && `; ${words.welt}`}
+      </Row>
+      <Row name="Closure">
+        Zip {show(cut.zip.lengthMm)} in the {spec.zipEdge} edge, {show(cut.zip.wrapMm)} round each corner
+        {words.closure !== '' && `; ${words.closure}`}
+      </Row>
+      {buttons.count > 0 && (
+        <Row name="Buttons">
+          {buttons.count}, on {buttons.alignedTo === 'joints' ? 'board joints' : 'board centres'}
+          {words.buttons !== '' && `; ${words.buttons}`}
+        </Row>
+      )}
+      {words.fixing !== '' && <Row name="Fixing">{words.fixing}</Row>}
+    </dl>
+  );
+}
+
+function Group({ group, words }: { group: CushionGroup; words: OrderSpec }) {
+  const { spec, marks, mirroredMarks } = group;
+  const drawing = useMemo(() => cushionDrawing(spec), [spec]);
+  return (
+    <section className="ruled grid gap-x-10 gap-y-4 pt-3 pb-10 lg:grid-cols-[17.5rem_1fr]">
+      <div>
+        <h3 className="flex flex-wrap items-center gap-2 font-semibold">
+          {marks.map((mark) => (
+            <MarkTag key={mark} timber="cushion" mark={mark} />
+          ))}
+          <span className="flex-1">{HAND_WORDS[group.hand]}</span>
+          <span className="font-normal text-ink-2">make {marks.length}</span>
+        </h3>
+        <p className="mt-3 text-2xl font-light tracking-hero">
+          <Sizes size={spec.finishedMm} />
+        </p>
+        <p className="mb-2 text-sm text-ink-2">
+          Finished, seam to seam. {Math.round(spec.finishedMm.widthMm)} ×{' '}
+          {Math.round(spec.finishedMm.depthMm)} × {Math.round(spec.finishedMm.thicknessMm)} mm, ±¼″.{' '}
+          {spec.kind === 'seat' ? 'Seat' : 'Back'} of {spec.benchMark}.
+        </p>
+        <Facts spec={spec} words={words} />
+        {mirroredMarks.length > 0 && (
+          <p className="mt-3 text-sm text-ink-2">{mirroredMarks.join(', ')}: the same, mirrored.</p>
+        )}
+      </div>
+      <div className="min-w-0">
+        <p className="flex flex-wrap justify-between gap-x-4 text-sm">
+          <b className="font-semibold">
+            {marks[0]} {spec.kind === 'seat' ? 'from above, back edge up' : 'from the front, top edge up'}
+          </b>
+          <span className="text-ink-2">drawn: {HAND_WORDS[group.hand]}</span>
+        </p>
+        <div className="overflow-x-auto">
+          <div className="min-w-[34rem]">
+            <CushionDrawing
+              drawing={drawing.plan}
+              label={`${marks.join(', ')}, plan with measures`}
+              widthPx={680}
+            />
+          </div>
+        </div>
+        <div className="grid gap-6 sm:grid-cols-2">
+          <div>
+            <p className="text-sm text-ink-2">From the front</p>
+            <CushionDrawing drawing={drawing.front} label={`${marks[0] ?? ''}, front edge`} widthPx={300} />
+          </div>
+          <div>
+            <p className="text-sm text-ink-2">Cut, front at the right, not loaded</p>
+            <CushionDrawing drawing={drawing.section} label={`${marks[0] ?? ''}, section`} widthPx={300} />
+          </div>
+        </div>
+      </div>
+    </section>
+  );
+}
+
+/** Every distinct cushion of an order with its sizes and drawings. */
+export function CushionGroups({ cushions, words }: { cushions: readonly CushionSpec[]; words: OrderSpec }) {
+  const groups = useMemo(() => groupCushions(cushions), [cushions]);
+  if (groups.length === 0) {
+    return (
+      <p className="ruled py-4 text-ink-2">
+        This revision has no cushioned bench, so there is nothing to order.
+      </p>
+    );
+  }
+  return groups.map((group) => <Group key={group.marks.join()} group={group} words={words} />);
+}

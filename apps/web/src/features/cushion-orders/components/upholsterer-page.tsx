@@ -1,0 +1,164 @@
+import { useEffect, useState, type ReactNode } from 'react';
+import { Button } from '@/components/button.tsx';
+import { LoadingLine } from '@/components/loading.tsx';
+import { Notice } from '@/components/notice.tsx';
+import { RuleHeading } from '@/components/rule-heading.tsx';
+import { TextField } from '@/components/text-field.tsx';
+import { dayWords } from '@/lib/dates.ts';
+import { usePageTitle } from '@/lib/page-title.ts';
+import { sayProblem } from '@/lib/problem.ts';
+import { setProductionUnits } from '@/lib/unit-choice.ts';
+import { useAcknowledge, usePublicOrder, useReply } from '../api.ts';
+import type { PublicOrder } from '../order.ts';
+import { CushionGroups } from './cushion-groups.tsx';
+import { Thread } from './thread.tsx';
+import { WriteBox } from './write-box.tsx';
+
+function Fact({ name, children }: { name: string; children: ReactNode }) {
+  return (
+    <div>
+      <dt className="text-sm text-ink-2">{name}</dt>
+      <dd className="font-medium">{children}</dd>
+    </div>
+  );
+}
+
+function Acknowledge({ token, order }: { token: string; order: PublicOrder }) {
+  const acknowledge = useAcknowledge(token);
+  const [name, setName] = useState('');
+  const [error, setError] = useState<string | undefined>();
+  if (order.acknowledgement) {
+    return (
+      <Notice>
+        {order.acknowledgement.name} acknowledged revision {order.acknowledgement.revisionLetter} on{' '}
+        {dayWords(order.acknowledgement.at)}.
+      </Notice>
+    );
+  }
+  return (
+    <form
+      noValidate
+      className="grid gap-3"
+      onSubmit={(event) => {
+        event.preventDefault();
+        if (name.trim() === '') {
+          setError('No name was typed. Type your name, so that the workshop knows who has it.');
+          return;
+        }
+        acknowledge.mutate(name.trim());
+      }}
+    >
+      {acknowledge.isError && <Notice tone="wont">{sayProblem(acknowledge.error)}</Notice>}
+      <TextField
+        label="Your name, typed"
+        autoComplete="name"
+        maxLength={120}
+        value={name}
+        error={error}
+        onChange={(event) => {
+          setError(undefined);
+          setName(event.target.value);
+        }}
+      />
+      <Button type="submit" look="main" busy={acknowledge.isPending} busyWords="Saying so">
+        I have this order
+      </Button>
+      <p className="text-sm text-ink-2">
+        This says that revision {order.revisionLetter} has reached you, no more. Name, time and revision are
+        kept.
+      </p>
+    </form>
+  );
+}
+
+function Opened({ token, order }: { token: string; order: PublicOrder }) {
+  const reply = useReply(token);
+  usePageTitle(order.title);
+  useEffect(() => {
+    setProductionUnits({ system: order.units, roundTo: order.roundTo });
+    return () => setProductionUnits(null);
+  }, [order.units, order.roundTo]);
+  const marks = order.cushions.map(({ mark }) => mark);
+  return (
+    <div className="mx-auto grid max-w-[72rem] gap-x-16 gap-y-8 px-8 py-6 max-tablet:px-4 lg:grid-cols-[1fr_21rem]">
+      <div className="min-w-0">
+        <h1 tabIndex={-1} data-page-heading className="text-2xl font-light tracking-hero">
+          {order.title}
+        </h1>
+        <p className="text-ink-2">
+          Order {order.number}, revision {order.revisionLetter}, issued {dayWords(order.revisionIssuedAt)},
+          for {order.upholstererName}.
+          {order.workshop.telephone !== '' && ` Shop telephone ${order.workshop.telephone}.`}
+        </p>
+        <dl className="my-5 flex flex-wrap gap-x-10 gap-y-3">
+          <Fact name="Needed by">{order.neededBy ? dayWords(order.neededBy) : 'to be agreed'}</Fact>
+          <Fact name="Cushions">
+            {marks.length}: {marks.join(', ')}
+          </Fact>
+          <Fact name="For">
+            {order.productionName}, {order.setName}
+          </Fact>
+        </dl>
+        <CushionGroups cushions={order.cushions} words={order.spec} />
+        {order.spec.notes !== '' && <p className="mb-3 max-w-text whitespace-pre-line">{order.spec.notes}</p>}
+        {order.spec.flammability !== '' && (
+          <p className="max-w-text text-sm text-ink-2">
+            Flammability, recorded and not certified: {order.spec.flammability}
+          </p>
+        )}
+      </div>
+      <aside className="min-w-0">
+        <RuleHeading>The paper</RuleHeading>
+        <p className="pb-4">
+          <a className="link" href={`/api/link/${encodeURIComponent(token)}/spec.pdf`} download>
+            Drawing pack, PDF
+          </a>
+        </p>
+        <RuleHeading>So far</RuleHeading>
+        <Thread messages={order.messages} own="upholsterer" />
+        <WriteBox
+          keptAs={`link.${order.number}`}
+          label="Ask or answer the workshop"
+          verb="Send to the workshop"
+          placeholder={`Goes to ${order.workshop.contactName}`}
+          busy={reply.isPending}
+          send={(text) => reply.mutateAsync(text)}
+        />
+        <div className="mt-8">
+          <RuleHeading>Received?</RuleHeading>
+          <Acknowledge token={token} order={order} />
+        </div>
+        <p className="mt-6 text-sm text-ink-2">This link works until {dayWords(order.linkExpiresAt)}.</p>
+      </aside>
+    </div>
+  );
+}
+
+/** The upholsterer's page: one order by a private link, no account. */
+export function UpholstererPage({ token }: { token: string }) {
+  const order = usePublicOrder(token);
+  return (
+    <div className="min-h-dvh bg-paper">
+      <header className="flex min-h-14 items-center justify-between gap-4 border-b border-ink px-8 max-tablet:px-4">
+        <span className="font-semibold">{order.data?.workshop.name ?? 'Cushion order'}</span>
+        <span className="text-sm text-ink-2">Private link, this order only</span>
+      </header>
+      <main>
+        {order.isPending && (
+          <div className="page">
+            <LoadingLine words="Fetching the order" />
+          </div>
+        )}
+        {order.isError && (
+          <div className="page">
+            <h1 tabIndex={-1} data-page-heading className="mb-4 text-2xl font-light">
+              This order cannot be shown
+            </h1>
+            <Notice tone="wont">{sayProblem(order.error)}</Notice>
+          </div>
+        )}
+        {order.data && <Opened token={token} order={order.data} />}
+      </main>
+    </div>
+  );
+}

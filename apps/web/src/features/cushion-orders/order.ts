@@ -1,0 +1,97 @@
+import type { CushionSpec } from '@settlewright/geometry';
+import type { OrderState, RoundTo, UnitSystem } from '@/lib/contract.ts';
+
+/** The words of an order beside its sizes. */
+export interface OrderSpec {
+  cover: string;
+  foam: string;
+  welt: string;
+  closure: string;
+  fixing: string;
+  buttons: string;
+  notes: string;
+  flammability: string;
+}
+
+export const SPEC_WORDS: Record<keyof OrderSpec, string> = {
+  cover: 'Cover',
+  foam: 'Foam, beyond its grade',
+  welt: 'Welt',
+  closure: 'Closure',
+  fixing: 'Fixing',
+  buttons: 'Buttons',
+  notes: 'Notes, wear and ageing',
+  flammability: 'Flammability, required and evidence',
+};
+
+export interface Acknowledgement {
+  name: string;
+  at: string;
+  revisionLetter: string;
+}
+
+export interface OrderEvent {
+  kind: string;
+  at: string;
+  side: 'workshop' | 'upholsterer';
+  byName: string;
+  fromState: OrderState | null;
+  toState: OrderState | null;
+  revisionLetter: string;
+  note: string;
+}
+
+export interface OrderMessage {
+  id?: string;
+  side: 'workshop' | 'upholsterer';
+  authorName: string;
+  text: string;
+  at: string;
+}
+
+export interface Order {
+  id: string;
+  number: number;
+  title: string;
+  state: OrderState;
+  setId: string;
+  setName: string;
+  revisionLetter: string;
+  revisionIssuedAt: string;
+  neededBy: string | null;
+  cushionMarks: string[] | null;
+  upholsterer: { id: string; name: string; contactName: string; removed: boolean } | null;
+  openQuestions: number;
+  spec: OrderSpec;
+  cushions: CushionSpec[];
+  sent: { revisionLetter: string; at: string; byName: string; changedSince: boolean } | null;
+  acknowledgement: Acknowledgement | null;
+  link: { state: 'none' | 'valid' | 'expired' | 'revoked'; expiresAt: string | null };
+  lastMail: { id: string; state: string; at: string } | null;
+  nextStates: OrderState[];
+  maySend: boolean;
+  mayChange: boolean;
+  events: OrderEvent[];
+}
+
+/** What the holder of a private link sees. */
+export interface PublicOrder {
+  workshop: { name: string; telephone: string; contactName: string };
+  number: number;
+  title: string;
+  productionName: string;
+  setName: string;
+  upholstererName: string;
+  state: OrderState;
+  revisionLetter: string;
+  revisionIssuedAt: string;
+  neededBy: string | null;
+  units: UnitSystem;
+  roundTo: RoundTo;
+  sentAt: string;
+  spec: OrderSpec;
+  cushions: CushionSpec[];
+  messages: OrderMessage[];
+  acknowledgement: Acknowledgement | null;
+  linkExpiresAt: string;
+}
