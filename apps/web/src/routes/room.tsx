@@ -1,20 +1,17 @@
-import { useMemo, useState } from 'react';
+import { useMemo } from 'react';
 import { useParams } from 'react-router-dom';
-import { FitFoot, FitViewContext, type FitView } from '@/features/fit/index.ts';
-import { RoomPage, SpecLine, useRoomForFit, useSingleKeys } from '@/features/room/index.ts';
+import { FitFoot, FitViewContext } from '@/features/fit/index.ts';
+import { RoomPage, SpecLine, useRoomForFit } from '@/features/room/index.ts';
 
-/** The fit sheet at the foot of the room. */
-function Foot({ pageTo }: { pageTo: string }) {
+/** Hands the room's live sheet to the fit strip and drawer. */
+function RoomFoot({ pageTo }: { pageTo: string }) {
   const room = useRoomForFit();
-  const [openCellId, setOpenCellId] = useState<string | null>(null);
-  const singleKeys = useSingleKeys((state) => state.on);
-  const view = useMemo<FitView>(() => ({ ...room, openCellId, open: setOpenCellId }), [room, openCellId]);
   return (
-    <FitViewContext value={view}>
+    <FitViewContext value={room}>
       <FitFoot
         isOpen={room.drawerOpen}
         onToggle={() => room.openDrawer(!room.drawerOpen)}
-        shortcut={singleKeys ? 'F' : undefined}
+        shortcut="F"
         line={<SpecLine />}
         pageTo={pageTo}
       />
@@ -27,5 +24,5 @@ export function Component() {
   const { workshopId = '', productionId = '', setId = '' } = useParams();
   const path = useMemo(() => ({ workshopId, productionId, setId }), [workshopId, productionId, setId]);
   const pageTo = `/w/${workshopId}/p/${productionId}/sets/${setId}/fit`;
-  return <RoomPage key={setId} path={path} foot={<Foot pageTo={pageTo} />} />;
+  return <RoomPage key={setId} path={path} foot={<RoomFoot pageTo={pageTo} />} />;
 }

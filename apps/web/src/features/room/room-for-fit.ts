@@ -18,6 +18,8 @@ export interface RoomForFit {
   aside: (sitterId: string) => string;
   litCellId: string | null;
   light: (cellId: string | null) => void;
+  openCellId: string | null;
+  open: (cellId: string | null) => void;
   fixesFor?: (cell: FitCell) => Fix[];
   take?: (fix: Fix) => void;
   clientView: boolean;
@@ -30,6 +32,7 @@ export function useRoomForFit(): RoomForFit {
   const picture = usePicture();
   const store = useRoomStore();
   const litCellId = useRoom((state) => state.litCellId);
+  const openCellId = useRoom((state) => state.openCellId);
   const { fitOpen, clientView, openFit, select } = useRoomAddress();
   const actions = usePieceActions(select);
 
@@ -55,6 +58,8 @@ export function useRoomForFit(): RoomForFit {
       },
       litCellId,
       light: (cellId) => store.getState().light(cellId),
+      openCellId,
+      open: (cellId) => store.getState().openCell(cellId),
       ...(canEdit && {
         fixesFor: (cell: FitCell) => suggestFixes({ document: picture.document, cell, check: maker.check }),
         take: (fix: Fix) => {
@@ -77,6 +82,7 @@ export function useRoomForFit(): RoomForFit {
     detail,
     cast,
     litCellId,
+    openCellId,
     store,
     canEdit,
     maker,

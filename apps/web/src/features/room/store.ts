@@ -16,11 +16,14 @@ export interface RoomState extends UndoStep {
   preview: SetDocument | null;
   /** Cell of the fit sheet whose gap is lit. */
   litCellId: string | null;
+  /** Cell of the fit sheet whose slip is open. */
+  openCellId: string | null;
   commit: (document: SetDocument, step: string) => void;
   showPreview: (document: SetDocument | null) => void;
   /** Takes a document from the server; forgets the steps, as they belong to another base. */
   load: (document: SetDocument) => void;
   light: (cellId: string | null) => void;
+  openCell: (cellId: string | null) => void;
 }
 
 export type RoomStore = StoreApi<RoomState> & { temporal: StoreApi<TemporalState<UndoStep>> };
@@ -34,10 +37,12 @@ export function createRoomStore(document: SetDocument): RoomStore {
         step: '',
         preview: null,
         litCellId: null,
+        openCellId: null,
         commit: (next, step) => set({ document: next, step, preview: null }),
         showPreview: (preview) => set({ preview }),
         load: (next) => set({ document: next, step: '', preview: null }),
         light: (litCellId) => set({ litCellId }),
+        openCell: (openCellId) => set({ openCellId }),
       }),
       {
         limit: UNDO_STEPS,

@@ -40,6 +40,8 @@ export function NumberFlag({ pieceId, parameter, look, slipId, onHand, onNext }:
   const [width, setWidth] = useState(0);
   const [held, setHeld] = useState(false);
   const backToButton = useRef(false);
+  /** A digit that began the edit stands already; what was there before is replaced as a whole. */
+  const selectAll = useRef(true);
   const edit = useNumberEdit(parameter, style, change, {
     left: () => {
       backToButton.current = document.activeElement === field.current;
@@ -52,7 +54,7 @@ export function NumberFlag({ pieceId, parameter, look, slipId, onHand, onNext }:
   useLayoutEffect(() => {
     if (editing) {
       field.current?.focus();
-      field.current?.select();
+      if (selectAll.current) field.current?.select();
     } else if (backToButton.current) {
       backToButton.current = false;
       button.current?.focus();
@@ -68,6 +70,7 @@ export function NumberFlag({ pieceId, parameter, look, slipId, onHand, onNext }:
 
   function begin(text?: string) {
     setWidth(button.current?.offsetWidth ?? 0);
+    selectAll.current = text === undefined;
     edit.begin(text);
   }
 
@@ -80,6 +83,7 @@ export function NumberFlag({ pieceId, parameter, look, slipId, onHand, onNext }:
       begin(event.key);
     } else if (event.key === 'ArrowUp' || event.key === 'ArrowDown') {
       setWidth(button.current?.offsetWidth ?? 0);
+      selectAll.current = true;
       edit.keys(event);
     }
   }

@@ -63,6 +63,7 @@ export function RoomDesk({ userId, lastRevision, foot, aboutPiece }: Props) {
   const piece = document.pieces.find((candidate) => candidate.id === address.pieceId);
   const openCell = (cellId: string) => {
     store.getState().light(cellId);
+    store.getState().openCell(cellId);
     address.openFit(true);
   };
   const empty = document.pieces.length === 0;

@@ -49,12 +49,12 @@ export function SceneStage({ picture, piece, address, actions, onOpenCell }: Pro
   const hand = useSceneHand({ picture, view, letter, onSelect: address.select });
 
   const tapes = useMemo(
-    () => tapeLines(picture.document, picture.sheet, address.pieceId),
+    () => tapeLines(picture.document, picture.sheet, address.pieceId, picture.bodies),
     [picture, address.pieceId],
   );
   const shown =
     showTapes && !clientView
-      ? tapesAtRest(tapes, picture.sheet, address.pieceId, lit, view.narrow ? 2 : 12)
+      ? tapesAtRest(tapes, picture.sheet, address.pieceId, lit, view.narrow ? 2 : 5)
       : [];
   const bodies = showBodies ? picture.bodies.filter((body) => isBehind(body.crownMm, view.cut)) : [];
 

@@ -1,4 +1,10 @@
-import { formatLength, specSentence, type Piece, type SpecToken } from '@settlewright/geometry';
+import {
+  formatLength,
+  specSentence,
+  type LengthStyle,
+  type Piece,
+  type SpecToken,
+} from '@settlewright/geometry';
 import { Fragment, useId, useRef, useState } from 'react';
 import { Measure } from '@/components/measure.tsx';
 import { useSurroundings } from '../room-context.tsx';
@@ -20,14 +26,7 @@ export function SpecTokens({ tokens, piece, look, slipId, onHand, onNext }: Toke
   const numbers = numbersOf(piece);
   return tokens.map((token, n) => {
     if (token.kind === 'text') return <Fragment key={n}>{token.text}</Fragment>;
-    if (token.kind === 'derived') {
-      return (
-        <span key={token.key}>
-          {token.text}
-          {token.valueMm !== undefined && <Measure text={formatLength(token.valueMm, style)} />}
-        </span>
-      );
-    }
+    if (token.kind === 'derived') return <DerivedWords key={token.key} token={token} style={style} />;
     const parameter = numbers.get(token.key);
     return parameter ? (
       <NumberFlag
@@ -41,6 +40,23 @@ export function SpecTokens({ tokens, piece, look, slipId, onHand, onNext }: Toke
       />
     ) : null;
   });
+}
+
+/** What follows from the numbers, in plain ink: "sinks ¾″ under the reference sitter". */
+function DerivedWords({
+  token,
+  style,
+}: {
+  token: Extract<SpecToken, { kind: 'derived' }>;
+  style: LengthStyle;
+}) {
+  if (token.valueMm === undefined) return token.text;
+  const [verb, ...rest] = token.text.split(' ');
+  return (
+    <>
+      {verb} <Measure text={formatLength(token.valueMm, style)} /> {rest.join(' ')}
+    </>
+  );
 }
 
 /** The selected piece in one plain sentence, whose numbers are edited where they stand. */

@@ -1,5 +1,5 @@
 import type { LengthStyle } from '@settlewright/geometry';
-import { useRef, useState, type KeyboardEvent } from 'react';
+import { useState, type KeyboardEvent } from 'react';
 import { typedForm } from '@/components/measure.tsx';
 import { readNumber, showNumber, stepped, type NumberParameter, type Reading } from '../numbers.ts';
 import type { ChangeNumber } from './use-change-number.ts';
@@ -18,6 +18,12 @@ export interface NumberEdit {
   keys: (event: KeyboardEvent) => void;
 }
 
+/** What stands in the field; a stepped value keeps its exact size beside what is shown of it. */
+interface Typed {
+  text: string;
+  exact?: number;
+}
+
 const stepsOf = (event: KeyboardEvent): number => {
   const size = event.shiftKey ? 8 : event.altKey ? 0.5 : 1;
   return event.key === 'ArrowUp' ? size : -size;
@@ -30,30 +36,24 @@ export function useNumberEdit(
   change: ChangeNumber,
   after: { committed?: () => void; left?: () => void } = {},
 ): NumberEdit {
-  const [text, setText] = useState<string | null>(null);
+  const [typed, setTyped] = useState<Typed | null>(null);
   const [refused, setRefused] = useState<string>();
-  const exact = useRef<number | undefined>(undefined);
   const shown = showNumber(parameter, style);
-  const read = (typed: string): Reading => {
-    if (exact.current !== undefined) return { kind: 'value', value: exact.current };
-    return readNumber(parameter, typed, style);
-  };
-  const reading: Reading =
-    refused !== undefined ? { kind: 'unreadable', message: refused } : read(text ?? shown);
+  const read = (now: Typed): Reading =>
+    now.exact === undefined ? readNumber(parameter, now.text, style) : { kind: 'value', value: now.exact };
+  const inHand: Typed = typed ?? { text: shown };
+  const reading: Reading = refused === undefined ? read(inHand) : { kind: 'unreadable', message: refused };
 
-  function put(typed: string, value?: number) {
-    exact.current = value;
+  function put(next: Typed) {
     setRefused(undefined);
-    setText(typed);
-    const next =
-      value === undefined ? readNumber(parameter, typed, style) : { kind: 'value' as const, value };
-    change.preview(next.kind === 'value' ? next.value : null);
+    setTyped(next);
+    const value = read(next);
+    change.preview(value.kind === 'value' ? value.value : null);
   }
 
   function close() {
-    exact.current = undefined;
     setRefused(undefined);
-    setText(null);
+    setTyped(null);
     after.left?.();
   }
 
@@ -68,8 +68,8 @@ export function useNumberEdit(
   }
 
   function finish(): boolean {
-    if (text === null) return true;
-    const now = read(text);
+    if (typed === null) return true;
+    const now = read(typed);
     if (now.kind !== 'value') return false;
     const refusal = change.commit(now.value);
     if (refusal !== undefined) {
@@ -87,10 +87,10 @@ export function useNumberEdit(
   }
 
   function step(event: KeyboardEvent) {
-    const from = read(text ?? shown);
+    const from = read(inHand);
     const value = from.kind === 'value' || from.kind === 'outside' ? from.value : parameter.value;
     const next = stepped(parameter, style, value, stepsOf(event));
-    put(typedForm(showNumber(parameter, style, next)), next);
+    put({ text: typedForm(showNumber(parameter, style, next)), exact: next });
   }
 
   function keys(event: KeyboardEvent) {
@@ -98,22 +98,22 @@ export function useNumberEdit(
       event.preventDefault();
       event.stopPropagation();
       step(event);
-    } else if (event.key === 'Escape' && text !== null) {
+    } else if (event.key === 'Escape' && typed !== null) {
       event.preventDefault();
       event.stopPropagation();
       cancel();
-    } else if (event.key === 'Enter' && text !== null) {
+    } else if (event.key === 'Enter' && typed !== null) {
       event.preventDefault();
       finish();
     }
   }
 
   return {
-    editing: text !== null,
-    text: text ?? shown,
+    editing: typed !== null,
+    text: inHand.text,
     reading,
-    begin: (typed) => (typed === undefined ? setText(typedForm(shown)) : put(typed)),
-    type: (typed) => put(typed),
+    begin: (text) => (text === undefined ? setTyped({ text: typedForm(shown) }) : put({ text })),
+    type: (text) => put({ text }),
     take,
     cancel,
     finish,

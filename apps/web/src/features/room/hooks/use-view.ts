@@ -6,7 +6,9 @@ import { frameFor, type Cut, type Insets, type ViewLetter } from '../scene/views
 
 const WIDE: Insets = { top: 74, right: 40, bottom: 56, left: 96 };
 const NARROW: Insets = { top: 62, right: 14, bottom: 30, left: 14 };
+const LOW: Insets = { top: 54, right: 40, bottom: 14, left: 90 };
 const NARROW_PX = 560;
+const LOW_PX = 430;
 
 export interface View {
   controller: ViewController;
@@ -67,7 +69,14 @@ export function useView(
     const move = last.current !== null && (last.current.letter !== letter || last.current.zoom !== hand.zoom);
     last.current = { letter, zoom: hand.zoom };
     controller.show(
-      frameFor({ letter, bounds, viewport: size, insets: narrow ? NARROW : WIDE, cut, ...hand }),
+      frameFor({
+        letter,
+        bounds,
+        viewport: size,
+        insets: narrow ? NARROW : size.height < LOW_PX ? LOW : WIDE,
+        cut,
+        ...hand,
+      }),
       move,
     );
   }, [controller, letter, bounds, size, narrow, cut, hand]);

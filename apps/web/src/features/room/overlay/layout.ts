@@ -42,6 +42,12 @@ interface Box {
   bottom: number;
 }
 
+/** Something round that a flag had better not cover: a part of a body. */
+export interface Blob {
+  atMm: Vec3;
+  radiusMm: number;
+}
+
 const NAME_GAP = 18;
 const NAME_ABOVE_HEADS = 46;
 const EDGE = 6;
@@ -56,7 +62,7 @@ export function placeNames(
 ): PlacedName[] {
   const heads = names
     .map((name) => ({ name, head: project(frame, viewport, name.headMm) }))
-    .filter(({ head }) => head.x > -40 && head.x < viewport.width + 40)
+    .filter(({ head }) => head.x > EDGE && head.x < viewport.width - EDGE)
     .sort((a, b) => a.head.x - b.head.x);
   if (heads.length === 0) return [];
   const highest = Math.min(...heads.map(({ head }) => head.y));
@@ -105,6 +111,7 @@ export function placeFlags(
   flags: readonly FlagToPlace[],
   headsMm: readonly Vec3[],
   names: readonly PlacedName[],
+  bodies: readonly Blob[] = [],
 ): PlacedFlag[] {
   const pixels = viewport.height / (2 * frame.halfHeightMm);
   const taken: Box[] = headsMm.map((head) => {
@@ -113,20 +120,24 @@ export function placeFlags(
     return boxAt(top.x, top.y + height / 2, HEAD_WIDTH_MM * pixels, height);
   });
   if (names[0]) taken.push({ left: 0, right: viewport.width, top: names[0].y - 12, bottom: names[0].y + 12 });
+  const shy: Box[] = bodies.map(({ atMm, radiusMm }) => {
+    const at = project(frame, viewport, atMm);
+    return boxAt(at.x, at.y, radiusMm * 2 * pixels, radiusMm * 2 * pixels);
+  });
   return flags.map((flag) => {
     const from = project(frame, viewport, flag.fromMm);
     const to = project(frame, viewport, flag.toMm);
     const length = Math.hypot(to.x - from.x, to.y - from.y);
     const across =
       length < 1 ? { x: 1, y: 0 } : { x: (to.y - from.y) / length, y: -(to.x - from.x) / length };
-    const isFree = (x: number, y: number): boolean => {
+    const isFree = (x: number, y: number, avoid: readonly Box[]): boolean => {
       const box = boxAt(x, y, flag.width, flag.height);
       const inside =
         box.left >= EDGE &&
         box.right <= viewport.width - EDGE &&
         box.top >= EDGE &&
         box.bottom <= viewport.height - EDGE;
-      return inside && !taken.some((other) => meet(box, other));
+      return inside && ![...taken, ...avoid].some((other) => meet(box, other));
     };
     const on = (t: number) => ({ x: from.x + (to.x - from.x) * t, y: from.y + (to.y - from.y) * t });
     const middle = on(0.5);
@@ -136,16 +147,19 @@ export function placeFlags(
     };
     // A line much shorter than its flag would vanish behind it.
     const hides = length < Math.abs(across.x) * flag.height * 1.4 + Math.abs(across.y) * flag.width * 1.25;
-    if (!hides) {
-      for (const t of ALONG) {
-        const at = on(t);
-        if (isFree(at.x, at.y)) return keep(at.x, at.y, false);
+    // Clear of bodies if there is such a place, else at least of heads, names and other flags.
+    for (const avoid of [shy, []]) {
+      if (!hides) {
+        for (const t of ALONG) {
+          const at = on(t);
+          if (isFree(at.x, at.y, avoid)) return keep(at.x, at.y, false);
+        }
       }
-    }
-    for (const aside of ASIDE) {
-      const reach = Math.sign(aside) * (Math.abs(across.x) * flag.width * 0.5) + aside;
-      const at = { x: middle.x + across.x * reach, y: middle.y + across.y * aside };
-      if (isFree(at.x, at.y)) return keep(at.x, at.y, true);
+      for (const aside of ASIDE) {
+        const reach = Math.sign(aside) * (Math.abs(across.x) * flag.width * 0.5) + aside;
+        const at = { x: middle.x + across.x * reach, y: middle.y + across.y * aside };
+        if (isFree(at.x, at.y, avoid)) return keep(at.x, at.y, true);
+      }
     }
     const x = Math.min(Math.max(middle.x, EDGE + flag.width / 2), viewport.width - EDGE - flag.width / 2);
     const y = Math.min(Math.max(middle.y, EDGE + flag.height / 2), viewport.height - EDGE - flag.height / 2);

@@ -5,7 +5,8 @@ import { Measure } from '@/components/measure.tsx';
 import type { SeatedBody } from '../picture.ts';
 import { shortName } from '../sitters.ts';
 import type { ViewController } from '../scene/view-controller.ts';
-import { placeFlags, placeNames, tapePath } from './layout.ts';
+import { mix } from '../scene/vectors.ts';
+import { placeFlags, placeNames, tapePath, type Blob } from './layout.ts';
 import { TapeFlag } from './tape-flag.tsx';
 import { tapeTone } from './tape-words.ts';
 
@@ -81,6 +82,7 @@ export function Overlay(props: Props) {
       })),
       headsMm,
       names,
+      bodies.flatMap(blobsOf),
     );
     for (const flag of placed) {
       const tape = tapes.find((candidate) => candidate.id === flag.id);
@@ -157,4 +159,13 @@ export function Overlay(props: Props) {
       ))}
     </div>
   );
+}
+
+/** A body as a string of round spots, for labels that keep clear of it. */
+function blobsOf(body: SeatedBody): Blob[] {
+  return body.pose.segments.flatMap((segment): Blob[] => {
+    if (segment.kind === 'ellipsoid') return [{ atMm: segment.centreMm, radiusMm: segment.radiiMm[0] }];
+    const radiusMm = (segment.fromRadiusMm + segment.toRadiusMm) / 2;
+    return [0.2, 0.5, 0.8].map((t) => ({ atMm: mix(segment.fromMm, segment.toMm, t), radiusMm }));
+  });
 }

@@ -94,11 +94,17 @@ function EditableFlag({
   const [back, setBack] = useState(false);
   const edit = useNumberEdit(parameter, style, change, { left: () => setBack(true) });
   const slipId = useId();
+  const selectAll = useRef(true);
+
+  function begin(text?: string) {
+    selectAll.current = text === undefined;
+    edit.begin(text);
+  }
 
   useLayoutEffect(() => {
     if (edit.editing) {
       field.current?.focus();
-      field.current?.select();
+      if (selectAll.current) field.current?.select();
     } else if (back) button.current?.focus({ preventScroll: true });
     onLayout();
   }, [edit.editing, back, onLayout]);
@@ -109,14 +115,14 @@ function EditableFlag({
         ref={button}
         type="button"
         aria-label={`${sayTape(tape, style)}, edit`}
-        onClick={() => edit.begin()}
+        onClick={() => begin()}
         onBlur={() => setBack(false)}
         onKeyDown={(event) => {
           if (/^[0-9.]$/.test(event.key) && !event.ctrlKey && !event.metaKey && !event.altKey) {
             event.preventDefault();
             event.stopPropagation();
-            edit.begin(event.key);
-          } else if (event.key === 'F2') edit.begin();
+            begin(event.key);
+          } else if (event.key === 'F2') begin();
           else if (event.key.startsWith('Arrow')) {
             event.stopPropagation();
             edit.keys(event);

@@ -3,19 +3,26 @@ import { formatLength, spokenLength, type LengthStyle, type TapeLine } from '@se
 import { verdictWord } from '@/components/verdict.tsx';
 import { worstCell } from '../verdict-words.ts';
 
+/** Heights first: they decide most and are seen best from the aisle. */
+const FIRST = ['pressedSeatHeight', 'heightMm', 'backHeightMm', 'seatDepthMm'];
+const rankOf = ({ parameterKey = '' }: TapeLine): number =>
+  FIRST.includes(parameterKey) ? FIRST.indexOf(parameterKey) : FIRST.length;
+
 /** Tapes that are drawn at rest: the selected piece's own, the worst gap, and the lit one. */
 export function tapesAtRest(
   tapes: readonly TapeLine[],
   sheet: FitSheet,
   selectedPieceId: string | undefined,
   litCellId: string | null,
-  most = 12,
+  most = 5,
 ): TapeLine[] {
   const worst = worstCell(sheet);
   const gaps = tapes.filter(
     (tape) => tape.kind === 'gap' && (tape.cellId === litCellId || tape.cellId === worst?.id),
   );
-  const own = tapes.filter((tape) => tape.kind !== 'gap' && tape.pieceId === selectedPieceId);
+  const own = tapes
+    .filter((tape) => tape.kind !== 'gap' && tape.pieceId === selectedPieceId)
+    .sort((a, b) => rankOf(a) - rankOf(b));
   return [...own.slice(0, Math.max(1, most - gaps.length)), ...gaps];
 }
 

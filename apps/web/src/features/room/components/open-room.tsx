@@ -1,0 +1,86 @@
+import { useQuery } from '@tanstack/react-query';
+import { useMemo, type ReactNode } from 'react';
+import { Button } from '@/components/button.tsx';
+import { LoadingLine } from '@/components/loading.tsx';
+import { Notice } from '@/components/notice.tsx';
+import { usePageTitle } from '@/lib/page-title.ts';
+import { sayProblem } from '@/lib/problem.ts';
+import { useSession } from '@/lib/session.ts';
+import { useUnitStyle } from '@/lib/unit-choice.ts';
+import { useWorkshop } from '@/lib/workshop.ts';
+import { useCast, useServerFitSheet, useSetInfo, type SetPath } from '../api.ts';
+import { loadFitEngine } from '../engine.ts';
+import { useOpenedSet } from '../hooks/use-opened-set.ts';
+import { createPictureMaker } from '../picture.ts';
+import { AutosaveContext, RoomContext, type RoomSurroundings } from '../room-context.tsx';
+import { RoomStoreContext } from '../store.ts';
+
+interface OpenRoomProps {
+  path: SetPath;
+  children: ReactNode;
+}
+
+/** Opens a set: its draft, its people, the rules and body data, and the unsent work of this device. */
+export function OpenRoom({ path, children }: OpenRoomProps) {
+  const { canEdit } = useWorkshop();
+  const userId = useSession((state) => state.user?.id ?? '');
+  const style = useUnitStyle();
+  const info = useSetInfo(path);
+  const cast = useCast(path);
+  const engine = useQuery({ queryKey: ['fit-engine'], queryFn: loadFitEngine, staleTime: Infinity });
+  const server = useServerFitSheet(path, !canEdit);
+  const opened = useOpenedSet(path, userId, canEdit);
+  usePageTitle(info.data?.name);
+
+  const maker = useMemo(
+    () =>
+      engine.data && (canEdit || server.data)
+        ? createPictureMaker(engine.data, cast.data ?? [], canEdit ? undefined : server.data)
+        : undefined,
+    [engine.data, cast.data, canEdit, server.data],
+  );
+  const surroundings = useMemo<RoomSurroundings | undefined>(
+    () =>
+      engine.data && maker && opened.kind === 'open'
+        ? {
+            path,
+            setName: info.data?.name ?? 'Set',
+            canEdit,
+            detail: canEdit ? 'full' : 'verdicts',
+            style,
+            cast: cast.data ?? [],
+            engine: engine.data,
+            maker,
+          }
+        : undefined,
+    [path, info.data, canEdit, style, cast.data, engine.data, maker, opened],
+  );
+
+  const trouble = opened.kind === 'failed' ? opened.error : (engine.error ?? server.error);
+  if (trouble) {
+    return (
+      <div className="page">
+        <Notice tone="wont" title="The set cannot be opened">
+          {sayProblem(trouble)}
+          <p className="mt-3">
+            <Button onClick={() => location.reload()}>Try again</Button>
+          </p>
+        </Notice>
+      </div>
+    );
+  }
+  if (!surroundings || opened.kind !== 'open' || cast.isPending) {
+    return (
+      <div className="page">
+        <LoadingLine words={`Laying out ${info.data?.name ?? 'the set'}`} />
+      </div>
+    );
+  }
+  return (
+    <RoomContext value={surroundings}>
+      <RoomStoreContext value={opened.store}>
+        <AutosaveContext value={opened.autosave}>{children}</AutosaveContext>
+      </RoomStoreContext>
+    </RoomContext>
+  );
+}
