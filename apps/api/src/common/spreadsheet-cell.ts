@@ -3,7 +3,7 @@ const FORMULA_START = /^[=+\-−@\t\r]/;
 export type Cell = string | number | boolean | null | undefined;
 
 /** Text that a spreadsheet shows instead of running: a leading = + − @ gets an apostrophe before it. */
-export function neutralised(text: string): string {
+function neutralised(text: string): string {
   return FORMULA_START.test(text) ? `'${text}` : text;
 }
 

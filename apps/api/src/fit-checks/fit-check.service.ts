@@ -5,8 +5,6 @@ import {
   createBodyModel,
   type FitSheet,
   loadRuleBook,
-  MEASURE_INFO,
-  type MeasureKey,
   type RuleBook,
   type Sitter,
 } from '@settlewright/anthropometry';
@@ -19,6 +17,8 @@ function readData(name: string): unknown {
   return JSON.parse(readFileSync(require.resolve(`@settlewright/seed-data/${name}.json`), 'utf8'));
 }
 
+const ORDINALS = new Intl.PluralRules('en', { type: 'ordinal' });
+const ENDINGS: Partial<Record<Intl.LDMLPluralRule, string>> = { one: 'st', two: 'nd', few: 'rd' };
 const ONE: Record<'women' | 'men', string> = { women: 'Woman', men: 'Man' };
 
 /** Makes fit sheets on the server, so that verdicts can be shown to people who may not see measures. */
@@ -67,17 +67,7 @@ export class FitCheckService {
 }
 
 /** "Woman, 5th in stature". */
-export function mannequinName({
-  bodyData,
-  measure,
-  percentile,
-}: Extract<SitterRef, { kind: 'mannequin' }>): string {
-  return `${ONE[bodyData]}, ${ordinal(percentile)} in ${MEASURE_INFO[measure satisfies MeasureKey].plain}`;
-}
-
-function ordinal(n: number): string {
-  if (!Number.isInteger(n)) return `${n}th`;
-  const tens = n % 100;
-  const suffix = tens >= 11 && tens <= 13 ? 'th' : (['th', 'st', 'nd', 'rd'][n % 10] ?? 'th');
-  return `${n}${suffix}`;
+function mannequinName({ bodyData, measure, percentile }: Extract<SitterRef, { kind: 'mannequin' }>): string {
+  const ending = ENDINGS[ORDINALS.select(percentile)] ?? 'th';
+  return `${ONE[bodyData]}, ${percentile}${ending} in ${measure.replaceAll('_', ' ')}`;
 }

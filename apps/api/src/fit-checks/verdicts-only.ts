@@ -1,7 +1,7 @@
 import type { FitCell, FitSheet, Outcome } from '@settlewright/anthropometry';
 
 /** What everybody may know of a verdict: the word, the room left, and whether it was predicted. */
-export interface VerdictOnly {
+interface VerdictOnly {
   kind: 'verdict';
   verdict: Extract<Outcome, { kind: 'verdict' }>['verdict'];
   margin: number;
@@ -9,7 +9,7 @@ export interface VerdictOnly {
   estimated: boolean;
 }
 
-export type OpenOutcome = VerdictOnly | Exclude<Outcome, { kind: 'verdict' | 'information' }>;
+type OpenOutcome = VerdictOnly | Exclude<Outcome, { kind: 'verdict' | 'information' }>;
 export type OpenCell = Omit<FitCell, 'outcome'> & { outcome: OpenOutcome };
 
 export interface VerdictSheet extends Omit<FitSheet, 'rows' | 'publicRow' | 'piecesAndWays'> {

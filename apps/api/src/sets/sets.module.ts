@@ -53,6 +53,6 @@ import { SetsService } from './sets.service';
     NotesService,
     BuiltPartsService,
   ],
-  exports: [SetsService, RevisionsService],
+  exports: [DraftsService, SetsService, RevisionsService],
 })
 export class SetsModule {}

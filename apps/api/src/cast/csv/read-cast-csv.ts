@@ -5,7 +5,7 @@ import type { UnitSystem } from '../../productions/entities/production.entity';
 import { type CastRow, type CellProblem, type FileSetting, readCastRow } from './cast-row';
 import { type Column, readColumns } from './columns';
 
-export const CSV_MAX_BYTES = 2_000_000;
+const CSV_MAX_BYTES = 2_000_000;
 export const CSV_MAX_ROWS = 2_000;
 
 export interface ReadRow {

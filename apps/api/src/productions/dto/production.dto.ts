@@ -10,7 +10,7 @@ import {
   type UnitSystem,
 } from '../entities/production.entity';
 
-export const PRODUCTION_STATUSES = ['active', 'archived'] as const;
+const PRODUCTION_STATUSES = ['active', 'archived'] as const;
 export type ProductionStatus = (typeof PRODUCTION_STATUSES)[number];
 
 export class ProductionQuery extends PageQuery {

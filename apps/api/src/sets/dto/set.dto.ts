@@ -8,7 +8,7 @@ import { CountsDto } from './fit-sheet.dto';
 import { PersonDto } from './person.dto';
 import { RevisionDto } from './revision.dto';
 
-export const SET_STATUSES = ['active', 'archived'] as const;
+const SET_STATUSES = ['active', 'archived'] as const;
 export type SetStatus = (typeof SET_STATUSES)[number];
 
 export class SetQuery extends PageQuery {
