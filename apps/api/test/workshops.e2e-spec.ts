@@ -68,6 +68,7 @@ describe('members', () => {
       (await as(test, owner).get(`/workshops/${id}/members?search=${search}`).expect(200)).body.total;
     expect(await found('OLIVE')).toBe(1);
     expect(await found('%25')).toBe(0);
+    await as(test, owner).get(`/workshops/${id}/members?search=%00`).expect(400);
   });
 
   it.each([

@@ -7,6 +7,7 @@ import {
   Logger,
 } from '@nestjs/common';
 import type { Response } from 'express';
+import { QueryFailedError } from 'typeorm';
 import { Problem, type ProblemBody, problemBody } from './problem';
 
 @Catch()
@@ -27,7 +28,7 @@ export class ProblemFilter implements ExceptionFilter {
   private describe(exception: unknown): ProblemBody {
     if (exception instanceof Problem) return exception.body();
     if (exception instanceof HttpException) return describeHttp(exception);
-    const unreadable = describeUnreadable(exception);
+    const unreadable = describeUnreadable(exception) ?? describeRefusedByDatabase(exception);
     if (unreadable) return unreadable;
     this.logger.error(exception instanceof Error ? (exception.stack ?? exception.message) : exception);
     return problemBody(500, 'internal-error', 'Something went wrong here. Nothing was changed.');
@@ -66,4 +67,26 @@ function describeUnreadable(exception: unknown): ProblemBody | null {
   const { status } = exception;
   if (typeof status !== 'number' || status < 400 || status >= 500) return null;
   return problemBody(status, HTTP_CODES[status] ?? 'bad-request', 'The request cannot be read.');
+}
+
+/** PostgreSQL's own codes for values it cannot take; they come from the request, not from a fault here. */
+function describeRefusedByDatabase(exception: unknown): ProblemBody | null {
+  if (!(exception instanceof QueryFailedError)) return null;
+  const { code } = exception.driverError as { code?: string };
+  switch (code) {
+    case '22P02':
+      return problemBody(404, 'not-found', 'There is nothing at this address.');
+    case '22021':
+    case '22P05':
+    case '22003':
+      return problemBody(
+        400,
+        'bad-request',
+        'The request holds a character or a number that cannot be kept.',
+      );
+    case '23505':
+      return problemBody(409, 'conflict', 'Somebody else was quicker. Reload and try again.');
+    default:
+      return null;
+  }
 }

@@ -1,5 +1,6 @@
 import { randomUUID } from 'node:crypto';
 import type { IncomingMessage, ServerResponse } from 'node:http';
+import { RequestMethod } from '@nestjs/common';
 import type { Params } from 'nestjs-pino';
 
 const TOKEN_PATHS = /^(\/api\/link|\/api\/invitations|\/order|\/invitation|\/reset|\/confirm)\/[^/]+/i;
@@ -12,6 +13,7 @@ export function loggedPath(url: string): string {
 
 export function logParameters(level: string): Params {
   return {
+    forRoutes: [{ path: '{*path}', method: RequestMethod.ALL }],
     pinoHttp: {
       level,
       genReqId: (_request: IncomingMessage, response: ServerResponse) => {
