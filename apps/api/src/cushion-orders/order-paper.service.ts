@@ -1,12 +1,4 @@
-import {
-  type CushionSpec,
-  type Drawing,
-  type DrawShape,
-  type PagePoint,
-  planOf,
-  sectionOf,
-  type SetDocument,
-} from '@settlewright/geometry';
+import { planOf } from '@settlewright/geometry';
 import { Injectable } from '@nestjs/common';
 import { specPdf } from '../paper/spec-pdf';
 import { ProductionsService } from '../productions/productions.service';
@@ -14,9 +6,11 @@ import { WorkshopsService } from '../workshops/workshops.service';
 import { dayInWords, momentInWords } from './day-in-words';
 import type { CushionOrder } from './entities/cushion-order.entity';
 import { IssuedSets } from './issued-sets.service';
+import { markedSections } from './marked-sections';
 import type { OrderContent } from './order-content';
 import { specCushions } from './spec-cushions';
 
+/** Room for a mark that moves off its cushion. */
 const PLAN_MARGIN_MM = 60;
 
 /** The drawing pack of an order, made anew each time from the revision it cites. */
@@ -59,53 +53,7 @@ export class OrderPaper {
       words: content.spec,
       cushions: specCushions(cushions),
       plan: planOf(issued.document, { marks: 'cushions', marginMm: PLAN_MARGIN_MM }),
-      sections: sectionsOf(issued.document, cushions),
+      sections: markedSections(issued.document, cushions),
     });
   }
-}
-
-/** A cut through the first bench that the order asks cushions for, with their marks and no sizes. */
-function sectionsOf(
-  document: SetDocument,
-  cushions: readonly CushionSpec[],
-): { bench: string; drawing: Drawing }[] {
-  const [first] = cushions;
-  if (!first) return [];
-  const drawing = sectionOf(document, first.benchId, PLAN_MARGIN_MM);
-  const lines = drawing.shapes.filter(({ kind }) => kind !== 'dimension');
-  return [
-    { bench: first.benchMark, drawing: { ...drawing, shapes: [...lines, ...marksIn(lines, cushions)] } },
-  ];
-}
-
-function marksIn(shapes: readonly DrawShape[], cushions: readonly CushionSpec[]): DrawShape[] {
-  const pieces = new Set(cushions.map(({ benchId }) => benchId));
-  return [...pieces].flatMap((pieceId) => {
-    const cut = shapes
-      .flatMap((shape) =>
-        shape.kind === 'polygon' && shape.pieceId === pieceId && shape.fill === 'cloth'
-          ? [middle(shape.points)]
-          : [],
-      )
-      // y runs down the page: the seat is the lower of the two.
-      .sort((a, b) => b[1] - a[1]);
-    return (['seat', 'back'] as const).flatMap((kind): DrawShape[] => {
-      const marks = cushions
-        .filter((cushion) => cushion.benchId === pieceId && cushion.kind === kind)
-        .map(({ mark }) => mark);
-      const at = kind === 'seat' ? cut[0] : cut[1];
-      return at && marks.length > 0
-        ? [{ kind: 'text', at, text: rangeOf(marks), anchor: 'middle', pieceId }]
-        : [];
-    });
-  });
-}
-
-function rangeOf(marks: readonly string[]): string {
-  return marks.length > 1 ? `${marks[0]}–${marks.at(-1)}` : (marks[0] ?? '');
-}
-
-function middle(points: readonly PagePoint[]): PagePoint {
-  const [x, y] = points.reduce(([sx, sy], [px, py]) => [sx + px, sy + py], [0, 0]);
-  return [x / points.length, y / points.length];
 }

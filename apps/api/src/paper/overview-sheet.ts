@@ -81,7 +81,10 @@ function drawWords(sheet: Sheet, pack: SpecPack, frame: Frame): Fact[] {
     return used > room;
   });
   const here = fitting === -1 ? facts : facts.slice(0, fitting);
-  drawFacts(sheet, here, box);
+  const foot = drawFacts(sheet, here, box);
+  if (here.length < facts.length) {
+    sheet.text('More words of the order stand on a sheet of their own.', box.x, foot + 4.4);
+  }
   const sign = frame.bottom - 6.4;
   sheet.line(box.x, sign, box.x + box.width - 32, sign);
   sheet.line(box.x + box.width - 26, sign, box.x + box.width, sign);
@@ -142,7 +145,6 @@ function orderFacts(pack: SpecPack): Fact[] {
     ['Welt', words.welt],
     ['Buttons', words.buttons],
     ['Fixing', words.fixing],
-    ['Notes', words.notes],
   ];
   const tolerance = isMetric(units) ? '6 mm' : '¼″';
   const flammability = words.flammability
@@ -163,6 +165,7 @@ function orderFacts(pack: SpecPack): Fact[] {
       value:
         'Guidance for making, not certification. Local rules on fire and labels are the maker’s and the venue’s to settle.',
     },
+    ...(words.notes ? [{ label: 'Notes', value: bold(words.notes) }] : []),
   ];
 }
 
