@@ -3,12 +3,7 @@ import { PassportStrategy } from '@nestjs/passport';
 import { ExtractJwt, Strategy } from 'passport-jwt';
 import type { CurrentUserInfo } from '../common/access.decorator';
 import { InjectSettings, type Settings } from '../config/settings';
-import { SessionsService } from './sessions.service';
-
-export interface AccessTokenPayload {
-  sub: string;
-  sid: string;
-}
+import { type AccessTokenPayload, SessionsService } from './sessions.service';
 
 @Injectable()
 export class JwtStrategy extends PassportStrategy(Strategy, 'jwt') {

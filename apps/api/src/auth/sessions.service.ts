@@ -6,7 +6,6 @@ import { hashToken, newToken } from '../common/secret-token';
 import { Problem } from '../common/problem';
 import { RefreshToken } from './entities/refresh-token.entity';
 import { Session } from './entities/session.entity';
-import type { AccessTokenPayload } from './jwt.strategy';
 
 export const ACCESS_SECONDS = 10 * 60;
 export const SESSION_DAYS = 30;
@@ -17,6 +16,12 @@ export interface IssuedTokens {
   userId: string;
   accessToken: string;
   refreshToken: string;
+}
+
+/** `sub` is the person, `sid` the session. */
+export interface AccessTokenPayload {
+  sub: string;
+  sid: string;
 }
 
 type EndReason = NonNullable<Session['endedBecause']>;

@@ -10,7 +10,7 @@ export class OutboxAttachment {
   @Column('uuid')
   mailId: string;
 
-  @ManyToOne(() => OutboxMail, (mail) => mail.attachments, { onDelete: 'CASCADE' })
+  @ManyToOne(() => OutboxMail, { onDelete: 'CASCADE' })
   @JoinColumn({ name: 'mail_id' })
   mail: Relation<OutboxMail>;
 

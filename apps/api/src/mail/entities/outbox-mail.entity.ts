@@ -1,13 +1,4 @@
-import {
-  Column,
-  CreateDateColumn,
-  Entity,
-  Index,
-  OneToMany,
-  PrimaryGeneratedColumn,
-  type Relation,
-} from 'typeorm';
-import { OutboxAttachment } from './outbox-attachment.entity';
+import { Column, CreateDateColumn, Entity, Index, PrimaryGeneratedColumn } from 'typeorm';
 
 /**
  * `perhaps-sent`: a process ended between handing the mail over and noting it, or the line broke after the
@@ -51,9 +42,6 @@ export class OutboxMail {
 
   @Column({ type: 'text', nullable: true })
   html: string | null;
-
-  @OneToMany(() => OutboxAttachment, (attachment) => attachment.mail)
-  attachments: Relation<OutboxAttachment[]>;
 
   @Column('text', { default: 'queued' })
   state: MailState;
