@@ -58,7 +58,7 @@ export function massWords(kg: number, units: LengthStyle): string {
 }
 
 /** How far the seat goes down under a range of sitters, no finer than a quarter of an inch. */
-export function sinkWords(cushion: SpecCushion, units: LengthStyle): string {
+export function sinkWords(cushion: Pick<SpecCushion, 'foamGrade' | 'finished'>, units: LengthStyle): string {
   const { ifd25N, supportFactor } = cushion.foamGrade;
   const foam = { ifd25N, supportFactor, thicknessMm: cushion.finished.thicknessMm };
   const light = seatSinkMm(foam, LIGHT_SITTER.kg);

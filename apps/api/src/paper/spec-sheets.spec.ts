@@ -1,0 +1,140 @@
+import { describe, expect, it } from '@jest/globals';
+import fc from 'fast-check';
+import { jsPDF } from 'jspdf';
+import { CHECK_BAR_MM, drawCheckBar } from './check-bar';
+import { type Chain, chainDepth, drawChain } from './dimension-chain';
+import { scaleFor } from './drawing-scale';
+import { breakLines } from './paragraph';
+import { spaces } from './cushion-chains';
+import { Sheet, type TextStyle } from './sheet';
+import { sinkWords } from './spec-words';
+import { registerWorkSans } from './work-sans';
+
+interface Label {
+  text: string;
+  left: number;
+  right: number;
+  top: number;
+  bottom: number;
+}
+
+/** A sheet that remembers what is written and ruled on it. */
+class RememberingSheet extends Sheet {
+  readonly labels: Label[] = [];
+  readonly lines: [number, number, number, number][] = [];
+
+  override flag(text: string, x: number, y: number, style: TextStyle = {}): void {
+    const half = this.textWidth(text, style) / 2;
+    this.labels.push({ text, left: x - half, right: x + half, top: y - 2.3, bottom: y });
+  }
+
+  override line(x1: number, y1: number, x2: number, y2: number): void {
+    this.lines.push([x1, y1, x2, y2]);
+  }
+}
+
+const doc = new jsPDF({ unit: 'mm', putOnlyUsedFonts: true });
+registerWorkSans(doc);
+const newSheet = () => new RememberingSheet(doc, 297, 210);
+
+const overlap = (a: Label, b: Label) =>
+  a.left < b.right && b.left < a.right && a.top < b.bottom && b.top < a.bottom;
+
+describe('a chain of dimensions', () => {
+  const lengths = fc.array(fc.integer({ min: 1, max: 40 }), { minLength: 1, maxLength: 25 });
+  const chainOf = (parts: number[], direction: Chain['direction']): Chain => {
+    const stops = parts.reduce<number[]>((at, part) => [...at, (at.at(-1) ?? 0) + part], [10]);
+    return { stops, labels: parts.map((part) => `${part}¾`), at: 60, direction, outwards: -1 };
+  };
+
+  it('never writes one label over another, however narrow the spaces', () => {
+    fc.assert(
+      fc.property(lengths, fc.constantFrom('level' as const, 'upright' as const), (parts, direction) => {
+        const sheet = newSheet();
+        drawChain(sheet, chainOf(parts, direction));
+        const met = sheet.labels.flatMap((a, i) => sheet.labels.slice(i + 1).filter((b) => overlap(a, b)));
+        expect(met).toEqual([]);
+      }),
+      { numRuns: 60 },
+    );
+  });
+
+  it('keeps within the depth it asks for', () => {
+    fc.assert(
+      fc.property(lengths, (parts) => {
+        const sheet = newSheet();
+        const chain = chainOf(parts, 'level');
+        drawChain(sheet, chain);
+        expect(Math.min(...sheet.labels.map(({ top }) => top))).toBeGreaterThanOrEqual(
+          60 - chainDepth(sheet, chain) - 0.1,
+        );
+      }),
+      { numRuns: 30 },
+    );
+  });
+
+  it('says equal neighbours that have no room once, with their number', () => {
+    const sheet = newSheet();
+    drawChain(sheet, chainOf([2, 2, 2, 20], 'level'));
+    expect(sheet.labels.map(({ text }) => text)).toEqual(['3 × 2¾', '20¾']);
+    expect(sheet.lines.length).toBeGreaterThanOrEqual(6);
+  });
+
+  it('closes: the spaces that are shown add up to the length that is shown', () => {
+    const step = 25.4 / 16;
+    fc.assert(
+      fc.property(
+        fc.array(fc.double({ min: 1, max: 400, noNaN: true }), { minLength: 1, maxLength: 20 }),
+        (parts) => {
+          const stops = parts.reduce<number[]>((at, part) => [...at, (at.at(-1) ?? 0) + part], [0]);
+          const shown = spaces(stops, step).reduce((sum, space) => sum + space, 0);
+          expect(shown).toBeCloseTo(Math.round((stops.at(-1) ?? 0) / step) * step, 6);
+        },
+      ),
+    );
+  });
+});
+
+describe('scale and check bar', () => {
+  it('takes the largest scale of a shop rule at which the thing fits', () => {
+    const space = { widthMm: 136, heightMm: 78 };
+    // 42 3/4 in at 1½″ to the foot is 135.7 mm of paper.
+    expect(scaleFor('feet-inches', { widthMm: 1085.85, heightMm: 500 }, space)).toEqual({
+      factor: 1 / 8,
+      words: '1½″ = 1′\u00a00″, 1 : 8',
+    });
+    expect(scaleFor('millimetres', { widthMm: 1085.85, heightMm: 500 }, space).words).toBe('1 : 10');
+    expect(scaleFor('feet-inches', { widthMm: 1e7, heightMm: 1 }, space).factor).toBeLessThanOrEqual(
+      136 / 1e7,
+    );
+  });
+
+  it('rules exactly three inches', () => {
+    const sheet = newSheet();
+    drawCheckBar(sheet, 20, 50);
+    const [x1, , x2] = sheet.lines[0]!;
+    expect(x2 - x1).toBeCloseTo(3 * 25.4, 9);
+    expect(CHECK_BAR_MM).toBe(76.2);
+  });
+});
+
+describe('words', () => {
+  it('break at spaces, never between a number and its unit, and never run over the column', () => {
+    const sheet = newSheet();
+    const words = (width: number, text: string) =>
+      breakLines(sheet, text, width).map((line) => line.map(({ text: word }) => word).join(' '));
+    expect(words(20, 'boxing of 457 mm or so')).toEqual(['boxing of', '457\u00a0mm or', 'so']);
+    const long = words(20, 'x'.repeat(60));
+    expect(long.join('')).toBe('x'.repeat(60));
+    for (const line of long) expect(sheet.textWidth(line)).toBeLessThanOrEqual(20);
+  });
+
+  it('state the sink for a range of weights, no finer than a quarter of an inch', () => {
+    const foamGrade = { name: 'firm', densityKgM3: 42, ifd25N: 36 * 4.4482216, supportFactor: 2 };
+    const finished = { widthMm: 1000, depthMm: 450, thicknessMm: 101.6 };
+    // 4 in of 36 lb foam, support factor 2: 110 lb 0.76 in, 220 lb (0.78 × 220 × 0.7 ÷ 110 = 1.092 psi) 1.83 in.
+    expect(sinkWords({ foamGrade, finished }, { system: 'feet-inches', roundTo: 16 })).toBe(
+      'Sinks ¾″ to 1¾″ under sitters of 110 to 220\u00a0lb, give or take 30\u00a0%.',
+    );
+  });
+});
