@@ -93,6 +93,17 @@ export function jointOf(amounts: readonly Amount[]): JointComponent[] {
   for (const { terms } of amounts) {
     for (const { body } of terms) if (!bodies.includes(body)) bodies.push(body);
   }
+  const [only] = bodies;
+  if (bodies.length === 1 && only) {
+    // By far the most common case: no mixing, only the plain numbers to add.
+    const components = only.joint(amounts.map(({ terms }) => terms[0]?.parts ?? NO_PARTS));
+    for (const { means } of components) {
+      for (let i = 0; i < means.length; i += 1) {
+        means[i] = (means[i] as number) + (amounts[i] as Amount).constant;
+      }
+    }
+    return components;
+  }
   let joined: JointComponent[] = [
     {
       weight: 1,

@@ -89,14 +89,14 @@ const CLOSE_ENOUGH = 1e-4;
  * The room that a share p of such people have less than.
  *
  * @param rooms - from `roomWithin`
- * @param p - strictly between 0 and 1
+ * @param p - share, one of the two ends of the 90 % range
  * @param tolerance - stop when known this well, rule's unit
  * @returns rule's unit
  */
-export function roomQuantile(rooms: readonly Room[], p: number, tolerance = 0.05): number {
+export function roomQuantile(rooms: readonly Room[], p: 0.05 | 0.95, tolerance = 0.05): number {
   // Of two sides the lesser room counts: its quantile lies under both sides' own, and over their half-share ones.
-  const whole = normalQuantile(p);
-  const half = normalQuantile(p / 2);
+  const whole = standardQuantile(p);
+  const half = standardQuantile(p / 2);
   let low = Infinity;
   let high = -Infinity;
   for (const { means, sds } of rooms) {
@@ -129,5 +129,16 @@ export function roomQuantile(rooms: readonly Room[], p: number, tolerance = 0.05
   return (low + high) / 2;
 }
 
+const quantiles = new Map<number, number>();
+
+/** The few quantiles that are asked for again and again. */
+function standardQuantile(p: number): number {
+  const known = quantiles.get(p);
+  if (known !== undefined) return known;
+  const z = normalQuantile(p);
+  quantiles.set(p, z);
+  return z;
+}
+
 const leastAt = (means: readonly number[], sds: readonly number[], z: number): number =>
-  Math.min(...means.map((mean, i) => mean + z * (sds[i] as number)));
+  means.reduce((least, mean, i) => Math.min(least, mean + z * (sds[i] as number)), Infinity);

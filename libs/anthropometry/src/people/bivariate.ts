@@ -1,4 +1,4 @@
-import { normalCdf, normalDensity } from './normal.ts';
+import { normalCdf } from './normal.ts';
 
 /** Nodes and weights of the 20-point Gauss-Legendre rule on -1..1, positive half. */
 const NODES = [
@@ -12,6 +12,7 @@ const WEIGHTS = [
 /** Correlation above which the integral over the angle gets too steep. */
 const STEEP = 0.9;
 const FAR = 8.5;
+const FULL_TURN = 2 * Math.PI;
 /** Standard deviations beyond which less than 1 in ten thousand million is left. */
 const SURE = 6.5;
 
@@ -35,7 +36,7 @@ function integrate(f: (x: number) => number, from: number, to: number): number {
  * @param correlation - from -1 to 1
  * @returns 0 to 1, absolute error below 1e-9
  * @source Plackett's identity (derivative by the correlation is the density), integrated over the angle by
- *   Gauss-Legendre; near full correlation the conditional distribution is integrated instead
+ *   Gauss-Legendre from no correlation, or from full correlation where that is nearer
  */
 export function bivariateNormalCdf(h: number, k: number, correlation: number): number {
   if (h < -FAR || k < -FAR) return 0;
@@ -44,37 +45,29 @@ export function bivariateNormalCdf(h: number, k: number, correlation: number): n
   // Near full correlation the sum (or the difference) of the two hardly varies, and often that settles it.
   const sum = (h + k) / Math.sqrt(2 * (1 + correlation));
   if (sum < -SURE) return 0;
-  if (sum > SURE && correlation < 0) return Math.max(0, normalCdf(h) - normalCdf(-k));
+  if (sum > SURE && correlation < 0) return apart(h, k);
   if (Math.abs(h - k) > SURE * Math.sqrt(2 * (1 - correlation)) && correlation > 0) {
     return normalCdf(Math.min(h, k));
   }
   if (correlation > 1 - 1e-12) return normalCdf(Math.min(h, k));
-  if (correlation < -1 + 1e-12) return Math.max(0, normalCdf(h) - normalCdf(-k));
+  if (correlation < -1 + 1e-12) return apart(h, k);
+  const density = (angle: number): number => {
+    const cosine = Math.cos(angle);
+    return Math.exp(-(h * h + k * k - 2 * h * k * Math.sin(angle)) / (2 * cosine * cosine));
+  };
+  const angle = Math.asin(correlation);
   if (Math.abs(correlation) < STEEP) {
-    const density = (angle: number): number => {
-      const cosine = Math.cos(angle);
-      return Math.exp(-(h * h + k * k - 2 * h * k * Math.sin(angle)) / (2 * cosine * cosine));
-    };
-    return normalCdf(h) * normalCdf(k) + integrate(density, 0, Math.asin(correlation)) / (2 * Math.PI);
+    return normalCdf(h) * normalCdf(k) + integrate(density, 0, angle) / FULL_TURN;
   }
-  return conditionalIntegral(h, k, correlation);
+  // Near full correlation the way from there is short; close to it the density rises from nothing, so it is cut there.
+  const [far, start] =
+    correlation > 0 ? [Math.PI / 2, normalCdf(Math.min(h, k))] : [-Math.PI / 2, apart(h, k)];
+  const first = far + (angle - far) * 0.1;
+  const second = far + (angle - far) * 0.4;
+  const way =
+    integrate(density, far, first) + integrate(density, first, second) + integrate(density, second, angle);
+  return Math.min(1, Math.max(0, start + way / FULL_TURN));
 }
 
-function conditionalIntegral(h: number, k: number, correlation: number): number {
-  const rest = Math.sqrt(1 - correlation * correlation);
-  const f = (x: number): number => normalDensity(x) * normalCdf((k - correlation * x) / rest);
-  // The second factor goes from 0 to 1 over a few times `rest` around this point; beyond, it is 0 or 1.
-  const step = k / correlation;
-  const reach = (7 * rest) / Math.abs(correlation);
-  const from = Math.max(step - reach, -FAR);
-  const to = Math.min(step + reach, h);
-  let share = 0;
-  if (correlation > 0) share += normalCdf(Math.min(h, step - reach));
-  else if (h > step + reach) share += normalCdf(h) - normalCdf(step + reach);
-  if (to > from) {
-    const first = Math.min(to, Math.max(from, step - reach / 3));
-    const second = Math.min(to, Math.max(from, step + reach / 3));
-    share += integrate(f, from, first) + integrate(f, first, second) + integrate(f, second, to);
-  }
-  return Math.min(1, Math.max(0, share));
-}
+/** Share below both limits when one value is the other's opposite. */
+const apart = (h: number, k: number): number => Math.max(0, normalCdf(h) - normalCdf(-k));
