@@ -2,7 +2,7 @@ import type { Vec3 } from '../parts/part.ts';
 import { LIMB_COLUMNS, type Cage } from './cage.ts';
 import type { Figure } from './figure.ts';
 import { HIP_FORWARD_MM, HIP_HEIGHT_MM, restAnkle, restKnee, type Stance } from './stance.ts';
-import { add, along, mix, mixPoints, scale, sub, turnAboutX, turnAboutY } from './vector.ts';
+import { add, along, clamp, mix, mixPoints, scale, sub, turnAboutX, turnAboutY } from './vector.ts';
 
 /**
  * Points of one limb ring: `across` and `up` are half axes, column 3 lies at `across`, column 1 at `up`.
@@ -21,31 +21,71 @@ function legRing(centre: Vec3, across: Vec3, up: Vec3, inward = 1): Vec3[] {
 const between = (front: Vec3, back: Vec3, halfWidth: number, inward = 1): Vec3[] =>
   legRing(mixPoints(front, back, 0.5), [halfWidth, 0, 0], scale(sub(front, back), 0.5), inward);
 
+/** Upper sides of the thigh's three rings: how far forward, how high, and half as wide. */
+interface ThighRing {
+  z: number;
+  top: number;
+  centreX: number;
+  half: number;
+}
+
+function thighRings(f: Figure): [ThighRing, ThighRing, ThighRing] {
+  const h = f.HB / 2;
+  const t = f.KH - f.PH;
+  const belly = 30 + 0.02 * f.CD + f.AD;
+  const crease = HIP_FORWARD_MM + 0.42 * (belly - HIP_FORWARD_MM);
+  const flesh = Math.max(0, f.TC - t - 45);
+  const z3 = f.BPL - 46;
+  const z1 = Math.min(Math.max(crease + 62, belly + 6), z3 - 88);
+  const kneeX = restKnee(f)[0];
+  return [
+    { z: z1, top: f.TC, centreX: 0.515 * h, half: 0.455 * h },
+    {
+      z: mix(z1, z3, 0.52),
+      top: mix(f.TC, t, 0.3),
+      centreX: mix(0.515 * h, kneeX, 0.5),
+      half: mix(0.455 * h, f.radius.knee, 0.36),
+    },
+    { z: z3, top: t + 7 + 0.2 * flesh, centreX: kneeX, half: f.radius.knee },
+  ];
+}
+
+/**
+ * Height of a thigh's upper side over the seat.
+ *
+ * @param x - from the sitter's midline
+ * @param z - forward of the rearmost buttock
+ */
+export function thighTop(f: Figure, x: number, z: number): number {
+  const [first, second, third] = thighRings(f);
+  const [from, to] = z < second.z ? [first, second] : [second, third];
+  const t = clamp((z - from.z) / (to.z - from.z), 0, 1);
+  const top = mix(from.top, to.top, t);
+  const aside = clamp(Math.abs(x - mix(from.centreX, to.centreX, t)) / mix(from.half, to.half, t), 0, 0.95);
+  return (top / 2) * (1 + (1 - aside ** 2.2) ** (1 / 2.2));
+}
+
 /** Sections of the left leg as measured: thigh along the seat, shin upright. Rings 1 to 12, then the toe. */
 function restLeg(f: Figure, shoeMm: number): { rings: Vec3[][]; toe: Vec3 } {
-  const { TC, PH, BPL, BKL, MH, FL, FB, k, radius } = f;
-  const h = f.HB / 2;
+  const { PH, BPL, BKL, MH, FL, FB, k, radius } = f;
   const t = f.KH - PH;
-  const A = 30 + 0.02 * f.CD + f.AD;
-  const Z = HIP_FORWARD_MM + 0.42 * (A - HIP_FORWARD_MM);
   const kneeX = restKnee(f)[0];
   const q = radius.knee;
-  const z3 = BPL - 52;
-  const z1 = Math.min(Math.max(Z + 62, A + 6), z3 - 80);
-  const z2 = mix(z1, z3, 0.52);
-  const x2 = mix(0.515 * h, kneeX, 0.5);
   const sole = -PH;
   const tread = sole - 6 - shoeMm;
   const z0 = (BPL + BKL) / 2 - 4;
   const a = radius.ankle;
   const heel = z0 - 0.255 * FL;
+  const [first, second, third] = thighRings(f);
+  const thigh = ({ z, top, centreX, half }: ThighRing, inward = 1): Vec3[] =>
+    between([centreX, top, z], [centreX, -8, z], half, inward);
   const foot = (share: number, height: number, half: number): Vec3[] =>
     between([kneeX, sole + height * MH, heel + share * FL], [kneeX, tread, heel + share * FL], half * FB);
   return {
     rings: [
-      between([0.515 * h, TC, z1], [0.515 * h, -8, z1], 0.455 * h, 0.5 / 0.455),
-      between([x2, mix(TC, t, 0.28), z2], [x2, -8, z2], mix(0.455 * h, q, 0.36)),
-      between([kneeX, t + 7, z3], [kneeX, -8, z3], q),
+      thigh(first, 0.5 / 0.455),
+      thigh(second),
+      thigh(third),
       between([kneeX, t - 22, BKL - 20], [kneeX, 2, BPL + 6], 0.98 * q),
       between([kneeX, -46 * k, BKL - 6], [kneeX, -46 * k, BPL + 1], 0.91 * q),
       between([kneeX, -0.36 * PH, BKL - 20], [kneeX, -0.36 * PH, BPL - 7], 0.95 * radius.calf),
