@@ -1,4 +1,4 @@
-import { afterAll, beforeAll, describe, expect, it } from '@jest/globals';
+import { afterAll, beforeAll, describe, expect, it, jest } from '@jest/globals';
 import type { Response } from 'supertest';
 import { ROLES, type Role } from '../src/common/access.decorator';
 import { bodiesFor } from './access/bodies';
@@ -7,6 +7,8 @@ import { fillPath, listRoutes, type Route } from './access/routes';
 import { as, createPerson, type Person } from './factories/people';
 import { createShop, type Shop } from './factories/shop';
 import { startTestApp, type TestApp } from './test-app';
+
+jest.setTimeout(60_000);
 
 let test: TestApp;
 let routes: Route[];
@@ -17,7 +19,7 @@ beforeAll(async () => {
   routes = listRoutes(test);
   shop = await createShop(test, 'Ours');
   elsewhere = await createShop(test, 'Theirs');
-}, 60_000);
+});
 afterAll(() => test.close());
 
 const expectedOf = (route: Route): readonly string[] => EXPECTED_ACCESS[route.name] ?? [];
@@ -130,7 +132,7 @@ describe.each(ROLES)('the %s', (role: Role) => {
     const note = { text: 'My own, which I may settle', kind: 'comment' };
     const made = await as(test, own.people[role]).post(notes).send(note).expect(201);
     own.parameters.noteId = made.body.id;
-  }, 60_000);
+  });
 
   const may = (route: Route) => expectedOf(route).includes(role);
 
@@ -160,5 +162,5 @@ describe.each(ROLES)('the %s', (role: Role) => {
     const isRight = (status: number, route: Route) =>
       route.method === 'get' ? status === 200 : status < 500 && ![400, 401, 403, 404].includes(status);
     expect(await wrongAnswers(inOrder, send, isRight)).toEqual([]);
-  }, 60_000);
+  });
 });

@@ -3,7 +3,7 @@ import { mkdtemp, rm, writeFile } from 'node:fs/promises';
 import { tmpdir } from 'node:os';
 import { join } from 'node:path';
 import { promisify } from 'node:util';
-import { afterAll, beforeAll, describe, expect, it } from '@jest/globals';
+import { afterAll, beforeAll, describe, expect, it, jest } from '@jest/globals';
 import type { Response } from 'supertest';
 import type { Role } from '../src/common/access.decorator';
 import { OrderLink } from '../src/cushion-orders/entities/order-link.entity';
@@ -14,6 +14,8 @@ import { as } from './factories/people';
 import { createShop, PRIVATE, type Shop } from './factories/shop';
 import { startTestApp, type TestApp } from './test-app';
 
+jest.setTimeout(60_000);
+
 let test: TestApp;
 let shop: Shop;
 let other: Shop;
@@ -23,7 +25,7 @@ beforeAll(async () => {
   test = await startTestApp();
   shop = await createShop(test, 'Ours');
   other = await createShop(test, 'Theirs');
-}, 60_000);
+});
 afterAll(async () => {
   await test.close();
   await rm(folder, { recursive: true });
