@@ -2361,6 +2361,11 @@ export interface components {
         AcknowledgeDto: {
             /** @description the name of whoever agrees, typed */
             name: string;
+            /**
+             * Format: date-time
+             * @description `sentAt` of the order that was read; refused when another was sent meanwhile
+             */
+            sentAt?: string;
         };
         ProblemBody: {
             type: string;
