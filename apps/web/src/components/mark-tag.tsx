@@ -7,7 +7,7 @@ const TIMBERS: Record<MarkTimber, string> = {
   table: 'border-walnut-3 bg-oak-2',
   sill: 'border-walnut-2 bg-sitter-6',
   cushion: 'border-cloth-3 bg-sitter-1',
-  wall: 'border-rule-strong bg-sunk text-ink',
+  wall: 'border-rule-strong bg-sunk text-ink!',
   seat: 'border-walnut-2 bg-oak-1',
 };
 

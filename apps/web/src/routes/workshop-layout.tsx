@@ -1,12 +1,14 @@
 import { useMemo } from 'react';
 import { Outlet, useParams } from 'react-router-dom';
 import { NotFoundPage } from '@/app/not-found-page.tsx';
+import { useUnsentSets } from '@/features/room/unsent-sets.ts';
 import type { Membership } from '@/lib/contract.ts';
 import { useSession } from '@/lib/session.ts';
 import { type TitleCell, useTitleCells } from '@/lib/title-cells.ts';
 
 function WorkshopCell({ workshop }: { workshop: Membership }) {
   const workshops = useSession((state) => state.workshops);
+  const { productionId } = useParams();
   const cells = useMemo<TitleCell[]>(
     () => [
       {
@@ -16,7 +18,7 @@ function WorkshopCell({ workshop }: { workshop: Membership }) {
         label: workshop.isDemo ? 'Workshop, demonstration' : 'Workshop',
         value: workshop.name,
         name: `Workshop: ${workshop.name}, menu`,
-        phone: true,
+        phone: productionId === undefined,
         menu: [
           { id: 'productions', words: 'Productions', to: `/w/${workshop.id}` },
           { id: 'settings', words: 'Workshop and people', to: `/w/${workshop.id}/workshop` },
@@ -26,7 +28,7 @@ function WorkshopCell({ workshop }: { workshop: Membership }) {
         ],
       },
     ],
-    [workshop, workshops],
+    [workshop, workshops, productionId],
   );
   useTitleCells(cells);
   return null;
@@ -35,6 +37,7 @@ function WorkshopCell({ workshop }: { workshop: Membership }) {
 /** Pages of one workshop; somebody else's workshop reads like an address that leads nowhere. */
 export function Component() {
   const { workshopId } = useParams();
+  useUnsentSets(useSession((state) => state.user?.id ?? ''));
   const workshop = useSession((state) => state.workshops.find((candidate) => candidate.id === workshopId));
   if (workshop === undefined) return <NotFoundPage />;
   return (

@@ -31,13 +31,13 @@ export function ConflictChoice({ difference, theirName, value, words, sheets, on
       <span className="font-medium">{name}</span>
       <span className="text-ink-2">
         <span className="tablet:sr-only">When you began </span>
-        <Measure text={sayValue(difference, difference.base, words)} />
+        <Measure text={sayValue(difference, 'base', words)} />
       </span>
       {(['mine', 'theirs'] as const).map((side) => (
         <Radio
           key={side}
           value={side}
-          aria-label={`${side === 'mine' ? 'Yours' : `${theirName}’s`}: ${sayValue(difference, difference[side], words)}`}
+          aria-label={`${side === 'mine' ? 'Yours' : `${theirName}’s`}: ${sayValue(difference, side, words)}`}
           className="quick group flex min-h-16 cursor-pointer flex-wrap items-center gap-x-5 gap-y-1 border-b-[3px] border-transparent px-4 py-2 hover:bg-sunk data-checked:border-chalk data-checked:bg-chalk-wash data-focus:shadow-(--focus-ring)"
         >
           <span
@@ -45,11 +45,11 @@ export function ConflictChoice({ difference, theirName, value, words, sheets, on
             style={{ borderRadius: '50%' }}
             className="size-[18px] shrink-0 border-[1.5px] border-rule-strong bg-sheet group-data-checked:border-[6px] group-data-checked:border-chalk"
           />
-          <span className="text-2xl font-light group-data-checked:font-normal group-data-checked:text-chalk">
+          <span className="text-2xl group-data-checked:text-chalk">
             <span className="text-sm text-ink-2 tablet:hidden">
               {side === 'mine' ? 'Yours ' : `${theirName}’s `}
             </span>
-            <Measure text={sayValue(difference, difference[side], words)} />
+            <Measure text={sayValue(difference, side, words)} />
           </span>
           <Verdicts here={sheets[side]} there={sheets[side === 'mine' ? 'theirs' : 'mine']} />
         </Radio>

@@ -35,7 +35,7 @@ export function ConflictScreen({ conflict }: { conflict: DraftConflict }) {
   const settled = differences.filter((difference) => !difference.conflict);
   const missing = open.filter((difference) => choices[difference.id] === undefined);
   const who = shortName(current.savedBy.name || 'Somebody');
-  const words: WordsOf = { style, cast, documents: [mine, theirs, base] };
+  const words: WordsOf = { style, cast, documents: { mine, theirs, base } };
 
   const merged = useMemo(() => mergeDocuments(base, mine, theirs, choices), [base, mine, theirs, choices]);
   /** The merge with one open difference taken from either side, the others as chosen or as they were. */
@@ -50,7 +50,7 @@ export function ConflictScreen({ conflict }: { conflict: DraftConflict }) {
     : [];
 
   return (
-    <div className="page max-w-[72rem]">
+    <div className="page max-w-[72rem]!">
       <h1
         tabIndex={-1}
         data-page-heading
@@ -98,16 +98,12 @@ export function ConflictScreen({ conflict }: { conflict: DraftConflict }) {
           >
             <span className="font-medium">{nameOf(difference)}</span>
             <span className="text-ink-2">
-              <Measure text={sayValue(difference, difference.base, words)} />
+              <Measure text={sayValue(difference, 'base', words)} />
             </span>
             <span className="text-ink-2">
               <strong className="font-semibold text-ink">
                 <Measure
-                  text={sayValue(
-                    difference,
-                    difference.changedBy === 'theirs' ? difference.theirs : difference.mine,
-                    words,
-                  )}
+                  text={sayValue(difference, difference.changedBy === 'theirs' ? 'theirs' : 'mine', words)}
                 />
               </strong>{' '}
               {difference.changedBy === 'mine'
@@ -143,7 +139,7 @@ export function ConflictScreen({ conflict }: { conflict: DraftConflict }) {
             ))}
           </>
         ) : (
-          <p>{merged.error.message}</p>
+          merged.error.code === 'invalid' && <p className="text-wont">{merged.error.message}</p>
         )}
       </div>
       {copyProblem && (

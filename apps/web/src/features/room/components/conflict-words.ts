@@ -12,7 +12,13 @@ import { shortName, sitterName } from '../sitters.ts';
 
 export type Side = 'mine' | 'theirs';
 
-export function nameOf({ mark, label, kind }: DocumentDifference): string {
+/** Stored values that the sentence says by a derived number: the deck follows from the seat height. */
+const SAID_AS: Partial<Record<string, { key: string; label: string }>> = {
+  deckHeightMm: { key: 'pressedSeatHeight', label: 'Seat height' },
+};
+
+export function nameOf({ mark, label: own, key = '', kind }: DocumentDifference): string {
+  const label = kind === 'parameter' ? (SAID_AS[key]?.label ?? own) : own;
   if (kind === 'piece') return label;
   return mark && !label.includes(mark) ? `${mark}, ${label.charAt(0).toLowerCase()}${label.slice(1)}` : label;
 }
@@ -20,8 +26,7 @@ export function nameOf({ mark, label, kind }: DocumentDifference): string {
 export interface WordsOf {
   style: LengthStyle;
   cast: readonly CastMember[];
-  /** Versions in which a parameter's kind and limits can be looked up. */
-  documents: readonly SetDocument[];
+  documents: Record<Side | 'base', SetDocument>;
 }
 
 function isSitter(value: unknown): value is SitterRef {
@@ -29,23 +34,22 @@ function isSitter(value: unknown): value is SitterRef {
 }
 
 /** One side of a difference as a person reads it. */
-export function sayValue(difference: DocumentDifference, value: unknown, words: WordsOf): string {
-  const { kind, key, pieceId } = difference;
+export function sayValue(difference: DocumentDifference, side: Side | 'base', words: WordsOf): string {
+  const { kind, key = '', pieceId } = difference;
+  const value = difference[side];
   if (value === undefined || value === null) return kind === 'seating' ? 'nobody' : 'none';
   if (kind === 'piece') return 'kept';
   if (kind === 'seating' && isSitter(value)) return sitterName(value, words.cast);
   if (key === 'at' && typeof value === 'object') return 'moved';
-  for (const document of words.documents) {
-    const piece = document.pieces.find((candidate) => candidate.id === pieceId);
-    const parameter = piece && parametersOf(piece).find((candidate) => candidate.key === key);
-    if (!parameter) continue;
-    if (typeof value === 'number' && typeof parameter.value === 'number') {
-      return showNumber({ ...parameter, value }, words.style);
-    }
-    const choice = parameter.choices?.find((candidate) => candidate.value === value);
-    if (choice) return choice.label;
+  const piece = words.documents[side].pieces.find((candidate) => candidate.id === pieceId);
+  const said = SAID_AS[key]?.key ?? key;
+  const parameter = piece && parametersOf(piece).find((candidate) => candidate.key === said);
+  if (parameter && typeof parameter.value === 'number') {
+    return showNumber({ ...parameter, value: parameter.value }, words.style);
   }
-  if (typeof value === 'number' && key?.endsWith('Mm')) {
+  const choice = parameter?.choices?.find((candidate) => candidate.value === value);
+  if (choice) return choice.label;
+  if (typeof value === 'number' && key.endsWith('Mm')) {
     return showNumber({ key, label: '', kind: 'length', unit: 'mm', min: 0, max: 1e5, value }, words.style);
   }
   if (typeof value === 'boolean') return value ? 'yes' : 'no';

@@ -1,13 +1,15 @@
 import type { Part, Piece } from '@settlewright/geometry';
-import { useState } from 'react';
+import { useEffect, useMemo, useState } from 'react';
 import { Button } from '@/components/button.tsx';
 import { Disclosure } from '@/components/disclosure.tsx';
 import { RuleHeading } from '@/components/rule-heading.tsx';
 import { TextArea } from '@/components/text-field.tsx';
 import { sayProblem } from '@/lib/problem.ts';
+import { useSession } from '@/lib/session.ts';
 import { useWorkshop } from '@/lib/workshop.ts';
 import { useAddNote, useBuilt, useMarkBuilt, useNotes, useResolveNote, type Note } from '../api.ts';
 import { useSurroundings } from '../room-context.tsx';
+import { createNoteDraft } from '../save/outbox.ts';
 
 interface Props {
   piece: Piece | undefined;
@@ -78,14 +80,30 @@ function NoteRow({ note, mark }: { note: Note; mark: string | undefined }) {
 function AddNote({ piece, kind }: { piece: Piece | undefined; kind: Note['kind'] }) {
   const { path } = useSurroundings();
   const add = useAddNote(path);
+  const userId = useSession((state) => state.user?.id ?? '');
+  const draft = useMemo(() => createNoteDraft(userId, path.setId), [userId, path.setId]);
   const [text, setText] = useState('');
+
+  useEffect(() => {
+    // Storage may be closed to the page; then a note lasts as long as the page does.
+    draft.read().then(
+      (kept) => kept !== undefined && setText((typed) => typed || kept),
+      () => undefined,
+    );
+  }, [draft]);
+
+  function type(next: string) {
+    setText(next);
+    draft.write(next).catch(() => undefined);
+  }
+
   return (
     <form
       className="grid gap-2"
       onSubmit={(event) => {
         event.preventDefault();
         if (text.trim() === '') return;
-        add.mutate({ text: text.trim(), pieceId: piece?.id, kind }, { onSuccess: () => setText('') });
+        add.mutate({ text: text.trim(), pieceId: piece?.id, kind }, { onSuccess: () => type('') });
       }}
     >
       <TextArea
@@ -94,7 +112,7 @@ function AddNote({ piece, kind }: { piece: Piece | undefined; kind: Note['kind']
         rows={2}
         maxLength={4000}
         error={add.error ? sayProblem(add.error) : undefined}
-        onChange={(event) => setText(event.target.value)}
+        onChange={(event) => type(event.target.value)}
       />
       <div>
         <Button type="submit" size="small" busy={add.isPending} busyWords="Sending">

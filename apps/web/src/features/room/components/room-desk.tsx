@@ -6,7 +6,7 @@ import { Notice } from '@/components/notice.tsx';
 import { useRoomAddress } from '../hooks/use-address.ts';
 import { usePieceActions } from '../hooks/use-piece-actions.ts';
 import { useRoomCells } from '../hooks/use-room-cells.ts';
-import { useSavedCell, useUnsentSets } from '../hooks/use-saved-cell.ts';
+import { useSavedCell } from '../hooks/use-saved-cell.ts';
 import { useShortcuts, type ShortcutActions } from '../hooks/use-shortcuts.ts';
 import { useAutosave, usePicture, useSurroundings } from '../room-context.tsx';
 import { useRoomStore, useUndo } from '../store.ts';
@@ -22,14 +22,13 @@ import { SceneStage } from './scene-stage.tsx';
 import { SpecSentence } from './spec-sentence.tsx';
 
 interface Props {
-  userId: string;
   lastRevision: string | undefined;
   foot: ReactNode;
   aboutPiece?: (piece: Piece) => ReactNode;
 }
 
 /** The room itself, once everything is there. */
-export function RoomDesk({ userId, lastRevision, foot, aboutPiece }: Props) {
+export function RoomDesk({ lastRevision, foot, aboutPiece }: Props) {
   const { canEdit, setName } = useSurroundings();
   const autosave = useAutosave();
   const { save } = useStore(autosave.state);
@@ -41,7 +40,6 @@ export function RoomDesk({ userId, lastRevision, foot, aboutPiece }: Props) {
   const [helpOpen, setHelpOpen] = useState(false);
   useRoomCells(lastRevision);
   useSavedCell(autosave);
-  useUnsentSets(userId, setName, autosave);
 
   const keys = useMemo<ShortcutActions>(
     () => ({

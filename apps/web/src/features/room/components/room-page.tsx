@@ -1,6 +1,5 @@
 import type { Piece } from '@settlewright/geometry';
 import type { ReactNode } from 'react';
-import { useSession } from '@/lib/session.ts';
 import { useSetInfo, type SetPath } from '../api.ts';
 import { BandLinkContext, type BandLinkMaker } from './band-link.tsx';
 import { OpenRoom } from './open-room.tsx';
@@ -17,17 +16,11 @@ export interface RoomSlots {
 
 /** The room of a set. */
 export function RoomPage({ path, foot, bandLink, aboutPiece }: RoomSlots & { path: SetPath }) {
-  const userId = useSession((state) => state.user?.id ?? '');
   const info = useSetInfo(path);
   return (
     <OpenRoom path={path}>
       <BandLinkContext value={bandLink ?? null}>
-        <RoomDesk
-          userId={userId}
-          lastRevision={info.data?.lastRevision?.letter}
-          foot={foot}
-          aboutPiece={aboutPiece}
-        />
+        <RoomDesk lastRevision={info.data?.lastRevision?.letter} foot={foot} aboutPiece={aboutPiece} />
       </BandLinkContext>
     </OpenRoom>
   );

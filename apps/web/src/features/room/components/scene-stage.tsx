@@ -37,7 +37,7 @@ interface Props {
 
 /** The drawing, what stands over it and what can be done to it. */
 export function SceneStage({ picture, piece, address, actions, onOpenCell }: Props) {
-  const { style, canEdit } = useSurroundings();
+  const { style, canEdit, maker } = useSurroundings();
   const theme = useTheme((state) => state.choice);
   const lit = useRoom((state) => state.litCellId);
   const sheet = useRef<HTMLDivElement>(null);
@@ -45,7 +45,8 @@ export function SceneStage({ picture, piece, address, actions, onOpenCell }: Pro
   const [showBodies, setShowBodies] = useState(true);
   const [showTapes, setShowTapes] = useState(true);
   const { view: letter, clientView } = address;
-  const view = useView(picture, letter, address.pieceId, sheet);
+  const settled = maker.picture(useRoom((state) => state.document));
+  const view = useView(settled, letter, address.pieceId, sheet);
   const hand = useSceneHand({ picture, view, letter, onSelect: address.select });
 
   const tapes = useMemo(
@@ -130,6 +131,7 @@ export function SceneStage({ picture, piece, address, actions, onOpenCell }: Pro
         </SceneErrorBoundary>
         <Overlay
           controller={view.controller}
+          namesAtHeads={letter === 'D'}
           bodies={bodies}
           tapes={shown}
           style={style}

@@ -71,7 +71,7 @@ describe('a number of the spec sentence', () => {
 
   it('takes what is typed on Enter, as one named step, and says the verdicts that changed', async () => {
     const user = open();
-    await act(() => seat().focus());
+    act(() => seat().focus());
     await user.keyboard('{Enter}');
     expect(field()).toHaveValue('18″');
     await user.clear(field());
@@ -89,7 +89,7 @@ describe('a number of the spec sentence', () => {
 
   it('begins with the digit that is typed on it', async () => {
     const user = open();
-    await act(() => seat().focus());
+    act(() => seat().focus());
     await user.keyboard('457mm{Enter}');
     expect(valueOf('pressedSeatHeight')).toBeCloseTo(457, 9);
   });

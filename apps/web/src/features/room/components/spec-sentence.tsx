@@ -91,7 +91,7 @@ export function SpecSentence({ piece }: { piece: Piece }) {
           </p>
         )}
       </div>
-      <div className="min-h-12">
+      <div className="desk:min-h-[8.25rem]">
         {canEdit && spoken && (
           <NumberSlip
             id={slipId}

@@ -1,9 +1,7 @@
 import { useEffect } from 'react';
 import { useStore } from 'zustand';
 import { setSavedState, type SavedState } from '@/lib/saved-state.ts';
-import { registerUnsentWork } from '@/lib/unsent-work.ts';
-import { isUnsentState, type Autosave, type SaveState } from '../save/autosave.ts';
-import { countUnsent, wipeUnsent } from '../save/outbox.ts';
+import type { Autosave, SaveState } from '../save/autosave.ts';
 
 function cellOf(save: SaveState): SavedState {
   switch (save.kind) {
@@ -34,20 +32,4 @@ export function useSavedCell(autosave: Autosave): void {
     window.addEventListener('beforeunload', ask);
     return () => window.removeEventListener('beforeunload', ask);
   }, [autosave]);
-}
-
-/** Signing out asks about every set of this person that has unsent work on this device. */
-export function useUnsentSets(userId: string, setName: string, autosave: Autosave): void {
-  useEffect(
-    () =>
-      registerUnsentWork({
-        pending: async () => isUnsentState(autosave.state.getState().save) || (await countUnsent(userId)) > 0,
-        describe: async () => {
-          const sets = await countUnsent(userId);
-          return sets > 1 ? `changes to ${sets} sets` : `changes to ${setName}`;
-        },
-        wipe: () => wipeUnsent(userId),
-      }),
-    [userId, setName, autosave],
-  );
 }

@@ -31,6 +31,7 @@ const START: Hand = { zoom: 1, panMm: [0, 0], azimuth: 0.62, elevation: 0.38 };
 
 /** The frame of the present view: letter, size of the sheet, zoom and pan put together. */
 export function useView(
+  /** Of the committed document: the frame holds still while something is typed or dragged. */
   picture: RoomPicture,
   letter: ViewLetter,
   selectedPieceId: string | undefined,

@@ -88,6 +88,20 @@ export function placeNames(
   }));
 }
 
+/** Seen from above: each name just below its own head. */
+export function placeNamesAtHeads(
+  frame: ViewFrame,
+  viewport: Viewport,
+  names: readonly NameToPlace[],
+): PlacedName[] {
+  const pixels = viewport.height / (2 * frame.halfHeightMm);
+  return names.map((name) => {
+    const head = project(frame, viewport, name.headMm);
+    const x = Math.min(Math.max(head.x, EDGE + name.width / 2), viewport.width - EDGE - name.width / 2);
+    return { id: name.id, x, y: head.y + HEAD_WIDTH_MM * 0.75 * pixels + name.height / 2, head };
+  });
+}
+
 const boxAt = (x: number, y: number, width: number, height: number): Box => ({
   left: x - width / 2,
   right: x + width / 2,
@@ -119,7 +133,11 @@ export function placeFlags(
     const height = HEAD_HEIGHT_MM * pixels;
     return boxAt(top.x, top.y + height / 2, HEAD_WIDTH_MM * pixels, height);
   });
-  if (names[0]) taken.push({ left: 0, right: viewport.width, top: names[0].y - 12, bottom: names[0].y + 12 });
+  const rows = new Set(names.map((name) => name.y));
+  const [row] = rows;
+  if (rows.size === 1 && row !== undefined) {
+    taken.push({ left: 0, right: viewport.width, top: row - 12, bottom: row + 12 });
+  } else taken.push(...names.map((name) => boxAt(name.x, name.y, 90, 18)));
   const shy: Box[] = bodies.map(({ atMm, radiusMm }) => {
     const at = project(frame, viewport, atMm);
     return boxAt(at.x, at.y, radiusMm * 2 * pixels, radiusMm * 2 * pixels);

@@ -6,12 +6,14 @@ import type { SeatedBody } from '../picture.ts';
 import { shortName } from '../sitters.ts';
 import type { ViewController } from '../scene/view-controller.ts';
 import { mix } from '../scene/vectors.ts';
-import { placeFlags, placeNames, tapePath, type Blob } from './layout.ts';
+import { placeFlags, placeNames, placeNamesAtHeads, tapePath, type Blob } from './layout.ts';
 import { TapeFlag } from './tape-flag.tsx';
 import { tapeTone } from './tape-words.ts';
 
 interface Props {
   controller: ViewController;
+  /** From above there is no room over the heads: each name stands at its own. */
+  namesAtHeads: boolean;
   bodies: readonly SeatedBody[];
   tapes: readonly TapeLine[];
   style: LengthStyle;
@@ -32,7 +34,7 @@ const LINE_TONES = {
 
 /** Names and tapes over the picture, in screen pixels. React makes them; the view moves them. */
 export function Overlay(props: Props) {
-  const { controller, bodies, tapes, style, litCellId, onSelectPiece } = props;
+  const { controller, namesAtHeads, bodies, tapes, style, litCellId, onSelectPiece } = props;
   const layer = useRef<HTMLDivElement>(null);
   const someLit = tapes.some((tape) => tape.cellId !== undefined && tape.cellId === litCellId);
 
@@ -48,7 +50,7 @@ export function Overlay(props: Props) {
       return { width: element?.offsetWidth ?? 0, height: element?.offsetHeight ?? 0 };
     };
     const headsMm = bodies.map((body) => body.crownMm);
-    const names = placeNames(
+    const names = (namesAtHeads ? placeNamesAtHeads : placeNames)(
       frame,
       viewport,
       bodies.map((body) => ({
@@ -68,7 +70,9 @@ export function Overlay(props: Props) {
       element?.style.setProperty('transform', `translate(${name.x}px, ${name.y}px) translate(-50%, -50%)`);
       find<SVGPathElement>('leader', name.id)?.setAttribute(
         'd',
-        `M${name.x.toFixed(1)} ${(name.y + 11).toFixed(1)}L${name.head.x.toFixed(1)} ${(name.head.y - 2).toFixed(1)}`,
+        namesAtHeads
+          ? ''
+          : `M${name.x.toFixed(1)} ${(name.y + 11).toFixed(1)}L${name.head.x.toFixed(1)} ${(name.head.y - 2).toFixed(1)}`,
       );
     }
     const placed = placeFlags(
@@ -98,7 +102,7 @@ export function Overlay(props: Props) {
         : '';
       find<SVGPathElement>('tape-leader', flag.id)?.setAttribute('d', leader);
     }
-  }, [controller, bodies, tapes, style]);
+  }, [controller, namesAtHeads, bodies, tapes, style]);
 
   useLayoutEffect(layOut);
   useEffect(() => controller.subscribe(layOut), [controller, layOut]);

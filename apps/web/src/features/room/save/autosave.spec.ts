@@ -122,6 +122,16 @@ describe('autosave', () => {
     expect(kind()).toBe('saved');
   });
 
+  it('takes a newer draft that holds the same document for its own', async () => {
+    const { server, store, outbox, kind } = open();
+    server.saveElsewhere(set('mine'));
+    store.getState().commit(set('mine'), 'mine');
+    await vi.advanceTimersByTimeAsync(SAVE_DELAY_MS);
+    expect(kind()).toBe('saved');
+    expect(server.sent).toEqual([]);
+    expect(outbox.kept()).toBeUndefined();
+  });
+
   it('has nothing to send when a change was undone before it went out', async () => {
     const { server, store, outbox, kind } = open();
     store.getState().commit(set('never mind'), 'never mind');

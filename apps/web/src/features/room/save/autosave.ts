@@ -1,4 +1,4 @@
-import type { SetDocument } from '@settlewright/geometry';
+import { diffDocuments, type SetDocument } from '@settlewright/geometry';
 import { createStore, type StoreApi } from 'zustand';
 import type { Draft } from '@/lib/contract';
 import type { RoomStore } from '../store';
@@ -112,8 +112,23 @@ export function createAutosave(options: {
         show(outcome);
         return;
       case 'conflict':
-        show(outcome);
+        await meet(outcome.conflict, sent);
     }
+  }
+
+  /** A newer draft that changed nothing we lack, such as our own from another tab, is no conflict. */
+  async function meet(conflict: DraftConflict, sent: SetDocument) {
+    const { current } = conflict;
+    const began = conflict.base?.document ?? state.getState().base.document;
+    const differences = diffDocuments(began, sent, current.document);
+    if (differences.length === 0) {
+      await settle({ kind: 'saved', number: current.number, savedAt: current.savedAt }, sent);
+    } else if (differences.every(({ changedBy }) => changedBy === 'mine')) {
+      state.setState({ base: { number: current.number, document: current.document } });
+      show({ kind: 'waiting' });
+      await keep();
+      schedule(0);
+    } else show({ kind: 'conflict', conflict });
   }
 
   const unsubscribe = store.subscribe((now, before) => {
@@ -165,6 +180,3 @@ export function createAutosave(options: {
     },
   };
 }
-
-/** True while leaving the page would leave something behind that only this device has. */
-export const isUnsentState = (save: SaveState): boolean => save.kind !== 'saved';

@@ -26,6 +26,15 @@ export function createOutbox(userId: string, setId: string): Outbox {
   };
 }
 
+/** A note that was begun and not sent, for one person and set. */
+export function createNoteDraft(userId: string, setId: string) {
+  const key = `settlewright:note:${userId}:${setId}`;
+  return {
+    read: () => get<string>(key),
+    write: (text: string) => (text === '' ? del(key) : set(key, text)),
+  };
+}
+
 /** How many sets hold unsent work of this person on this device. */
 export async function countUnsent(userId: string): Promise<number> {
   return (await unsentKeys(userId)).length;
@@ -33,7 +42,10 @@ export async function countUnsent(userId: string): Promise<number> {
 
 /** Removes everything unsent of a person: only after they were warned. */
 export async function wipeUnsent(userId: string): Promise<void> {
-  await Promise.all((await unsentKeys(userId)).map((key) => del(key)));
+  const notes = (await keys()).filter(
+    (key) => typeof key === 'string' && key.startsWith(`settlewright:note:${userId}:`),
+  );
+  await Promise.all([...(await unsentKeys(userId)), ...notes].map((key) => del(key)));
 }
 
 async function unsentKeys(userId: string): Promise<IDBValidKey[]> {
