@@ -1,7 +1,7 @@
 import type { Piece } from '../room/document.ts';
 import { radians } from '../units/angle.ts';
 import type { MaterialKey, Part, PartRole, Solid, Vec3 } from './part.ts';
-import { toRoom } from './placement.ts';
+import { placer } from './placement.ts';
 
 /** A box before it is placed: its size and centre in the piece's frame. */
 export interface BoxInPiece {
@@ -45,6 +45,7 @@ export function partList(piece: Piece): PartList {
   const parts: Part[] = [];
   const counted = new Map<PartRole, number>();
   const turnRad = radians(piece.at.turnDeg);
+  const place = placer(piece.at);
   const add = (
     role: PartRole,
     material: MaterialKey,
@@ -61,7 +62,7 @@ export function partList(piece: Piece): PartList {
       role,
       material,
       solid,
-      positionMm: toRoom(piece.at, centre),
+      positionMm: place(centre),
       rotationRad,
       ...(grain === undefined ? {} : { grain }),
     });
@@ -69,7 +70,7 @@ export function partList(piece: Piece): PartList {
   return {
     parts,
     box(role, material, { sizeMm, centreMm, pitchRad = 0, yawRad = 0, grain }) {
-      if (Math.min(...sizeMm) < THINNEST_MM) return;
+      if (sizeMm[0] < THINNEST_MM || sizeMm[1] < THINNEST_MM || sizeMm[2] < THINNEST_MM) return;
       add(role, material, { shape: 'box', sizeMm }, centreMm, [pitchRad, turnRad + yawRad, 0], grain);
     },
     cylinder(role, material, { xMm, zMm, radiusMm, bottomMm, topMm }) {

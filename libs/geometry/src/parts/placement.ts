@@ -9,20 +9,30 @@ export type Placement = Piece['at'];
  * Takes a point from a piece's own frame to the room.
  *
  * @param at - where the piece stands
- * @param pointMm - in the piece's frame
+ * @param point - in the piece's frame, millimetres
  * @returns the same point in the room frame, millimetres
  */
-export function toRoom(at: Placement, [x, y, z]: Vec3): Vec3 {
+export function toRoom(at: Placement, point: Vec3): Vec3 {
+  return placer(at)(point);
+}
+
+/**
+ * Takes many points from one piece's frame to the room.
+ *
+ * @param at - where the piece stands
+ * @returns `toRoom` for that piece
+ */
+export function placer(at: Placement): (point: Vec3) => Vec3 {
   const turn = radians(at.turnDeg);
   const [c, s] = [Math.cos(turn), Math.sin(turn)];
-  return [at.xMm + x * c + z * s, y, at.zMm - x * s + z * c];
+  return ([x, y, z]) => [at.xMm + x * c + z * s, y, at.zMm - x * s + z * c];
 }
 
 /**
  * Takes a point from the room to a piece's own frame.
  *
  * @param at - where the piece stands
- * @param pointMm - in the room frame
+ * @param point - in the room frame, millimetres
  * @returns the same point in the piece's frame, millimetres
  */
 export function toPiece(at: Placement, [x, y, z]: Vec3): Vec3 {

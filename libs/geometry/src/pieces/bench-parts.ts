@@ -45,7 +45,15 @@ function back(list: PartList, bench: PieceOf<'bench'>, layout: BenchLayout): voi
   const faceTopZ = bench.backThicknessMm;
   const rearTopY = backTopMm - backBoardMm * sin;
   const rearTopZ = faceTopZ - backBoardMm * cos;
-  const boardLength = Math.min(downToDeck(backTopMm, faceTopZ), downToDeck(rearTopY, rearTopZ));
+  // Below the seat a leaning back comes forward: boards and posts stop short of the seat cushion.
+  const cushionRearZ =
+    layout.faceZMm - bench.seatCushion.thicknessMm * Math.max(0, -Math.sin(layout.tiltRad));
+  const downToCushion = sin > 1e-9 ? (cushionRearZ - faceTopZ) / sin : Infinity;
+  const boardLength = Math.min(
+    downToDeck(backTopMm, faceTopZ),
+    downToDeck(rearTopY, rearTopZ),
+    downToCushion,
+  );
   for (const board of boardRun(inner, bench.boards)) {
     list.box('back-board', 'oak', {
       sizeMm: [board.widthMm, boardLength, backBoardMm],
@@ -61,9 +69,17 @@ function back(list: PartList, bench: PieceOf<'bench'>, layout: BenchLayout): voi
 
   const postTopZ = faceTopZ - backBoardMm / cos;
   const reach = downToDeck(backTopMm, postTopZ);
+  const footZ = postTopZ + reach * sin;
+  const front: [number, number][] =
+    footZ <= cushionRearZ
+      ? [[footZ, backTopMm - reach * cos]]
+      : [
+          [cushionRearZ, layout.deckTopAt(cushionRearZ)],
+          [cushionRearZ, backTopMm - ((cushionRearZ - postTopZ) / sin) * cos],
+        ];
   const outlineMm = [
     [rearPanelMm, layout.deckTopAt(rearPanelMm)],
-    [postTopZ + reach * sin, backTopMm - reach * cos],
+    ...front,
     [postTopZ, backTopMm],
     [rearPanelMm, backTopMm],
   ] as const;
@@ -76,9 +92,16 @@ function back(list: PartList, bench: PieceOf<'bench'>, layout: BenchLayout): voi
 function cushions(list: PartList, bench: PieceOf<'bench'>, layout: BenchLayout): void {
   const { tiltRad, leanRad, faceZMm } = layout;
   const seat = bench.seatCushion.thicknessMm;
-  const slope = bench.seatDepthMm / Math.cos(tiltRad);
   const pad = bench.backCushion.thicknessMm;
-  const rise = (layout.backTopMm - layout.seatTopRearMm) / Math.cos(leanRad);
+  const [sinLean, cosLean] = [Math.sin(leanRad), Math.cos(leanRad)];
+  // Tilted forward, the lower rear edge of a seat cushion leans back; without a pad it is cut short of the boards.
+  const cutMm = Math.max(0, -seat * Math.sin(tiltRad) - pad / cosLean);
+  const slope = (bench.seatDepthMm - cutMm) / Math.cos(tiltRad);
+  // On a thin seat the lower rear edge of the pad would dip into the deck: it starts higher up the lean.
+  const padRearMm = layout.seatTopRearMm - pad * sinLean - layout.deckTopAt(faceZMm - pad * cosLean);
+  const start = Math.max(0, -padRearMm / (cosLean + sinLean * Math.tan(tiltRad)));
+  const rise = (layout.backTopMm - layout.seatTopRearMm) / cosLean - start;
+  const middle = start + rise / 2;
   for (const { kind, leftMm, rightMm } of cushionRuns(bench)) {
     const width = rightMm - leftMm;
     const x = (leftMm + rightMm) / 2;
@@ -87,8 +110,8 @@ function cushions(list: PartList, bench: PieceOf<'bench'>, layout: BenchLayout):
         sizeMm: [width, rise, pad],
         centreMm: [
           x,
-          layout.seatTopRearMm + (rise / 2) * Math.cos(leanRad) - (pad / 2) * Math.sin(leanRad),
-          faceZMm - (rise / 2) * Math.sin(leanRad) - (pad / 2) * Math.cos(leanRad),
+          layout.seatTopRearMm + middle * cosLean - (pad / 2) * sinLean,
+          faceZMm - middle * sinLean - (pad / 2) * cosLean,
         ],
         pitchRad: -leanRad,
       });

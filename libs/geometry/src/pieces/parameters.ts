@@ -1,6 +1,7 @@
 import type { z } from 'zod';
 import { pieceSchema, type Piece, type PieceKind, type SetDocument } from '../room/document.ts';
 import { withPath } from '../room/leaves.ts';
+import { withWallEndKept } from '../room/wall-end.ts';
 import { withoutLostSeats } from '../room/seating.ts';
 import { fail, ok, type Result } from '../units/result.ts';
 import type { Parameter, ParameterSpec } from './kind.ts';
@@ -53,7 +54,7 @@ export function parametersOf(piece: Piece): Parameter[] {
 }
 
 /**
- * Sets one parameter of one piece. Whoever sat at a place that is gone afterwards no longer sits.
+ * Sets one parameter of one piece. A piece with one end at a wall grows away from it. Whoever sat at a place that is gone afterwards no longer sits.
  *
  * @param document - the set
  * @param pieceId - the piece to change
@@ -81,6 +82,10 @@ export function setParameter(
   if (refused !== undefined) {
     return fail({ key, label: now.label, value, min: now.min, max: now.max, message: refused });
   }
+  if (piece.locked && key.startsWith('at.')) {
+    const message = `${piece.mark} is locked where it stands; unlock it to move it.`;
+    return fail({ key, label: now.label, value, min: now.min, max: now.max, message });
+  }
   const exact = typeof value === 'number' ? Math.min(now.max, Math.max(now.min, value)) : value;
   const changed = spec.write === undefined ? withPath(piece, key, exact) : spec.write(piece, exact);
   const parsed = pieceSchema.safeParse(changed);
@@ -88,7 +93,8 @@ export function setParameter(
     const message = `${now.label}: ${value} does not go with the rest of ${piece.mark}.`;
     return fail({ key, label: now.label, value, min: now.min, max: now.max, message });
   }
-  const pieces = document.pieces.map((one) => (one.id === pieceId ? parsed.data : one));
+  const kept = key === 'lengthMm' ? withWallEndKept(document, piece, parsed.data) : parsed.data;
+  const pieces = document.pieces.map((one) => (one.id === pieceId ? kept : one));
   return ok(withoutLostSeats({ ...document, pieces }));
 }
 

@@ -89,14 +89,15 @@ describe('a bench', () => {
     );
   });
 
-  it('splits a long run into equal cushions that fill it', () => {
+  it('splits a long run near equal parts, on board joints, and fills it', () => {
     const bench: PieceOf<'bench'> = { ...newPiece('bench', 'b1', 'B1', HERE), lengthMm: 3000 };
     const cushions = derivePieceParts(bench).filter(({ role }) => role === 'seat-cushion');
-    // 3000 − 2 × 12.7 = 2974.6, split below 1219.2: three of 991.53.
+    // 3000 − 2 × 12.7 = 2974.6 takes three below 1219.2. 37 boards stand centred, so the joint next to a
+    // third of the run lies 6.5 modules of 82.55 from the middle: 1073.15 between, 950.725 at each end.
     expect(cushions.map(({ solid }) => (solid.shape === 'box' ? solid.sizeMm[0] : 0))).toEqual([
-      expect.closeTo(991.533, 2),
-      expect.closeTo(991.533, 2),
-      expect.closeTo(991.533, 2),
+      expect.closeTo(950.725, 2),
+      expect.closeTo(1073.15, 2),
+      expect.closeTo(950.725, 2),
     ]);
   });
 

@@ -1,5 +1,6 @@
 import { snapToBoards } from '../parts/boards.ts';
 import { benchLayout } from '../pieces/bench-layout.ts';
+import { pieceEnvelope } from '../pieces/kinds.ts';
 import { BOARDS } from '../pieces/starting-sizes.ts';
 import { pressedSeatHeightMm, withPressedSeatHeight } from '../pieces/seat-sink.ts';
 import type { Piece, PieceKind, PieceOf, SetDocument } from './document.ts';
@@ -124,6 +125,8 @@ function windowSill(mark: string, fromX: number, toX: number): PieceOf<'sill'> {
 function uBooth(): SetDocument {
   const probe = bench('B1', [0, 0, 0], 1200);
   const front = benchFront(probe);
+  // The side benches stop where the tilted seat of the rear bench is farthest out.
+  const meeting = pieceEnvelope(probe).maxMm[2];
   const between = PLACE_MM + 2 * CORNER_MM;
   const side = 2 * PLACE_MM + CORNER_MM;
   const places: PieceOf<'bench'>['places'] = { by: 'width', widthMm: PLACE_MM };
@@ -140,8 +143,8 @@ function uBooth(): SetDocument {
   const wall = wallLength(rear + 160);
   return setOf([
     plain(bench('B1', [0, 0, 0], rear)),
-    plain(bench('B2', [-rear / 2, front + side / 2, 90], side)),
-    plain(bench('B3', [rear / 2, front + side / 2, -90], side)),
+    plain(bench('B2', [-rear / 2, meeting + side / 2, 90], side)),
+    plain(bench('B3', [rear / 2, meeting + side / 2, -90], side)),
     piece('table', 'T1', [0, front - OVERLAP_MM + tableLength / 2, 90], {
       lengthMm: tableLength,
       widthMm: between + 2 * OVERLAP_MM,

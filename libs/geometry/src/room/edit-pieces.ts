@@ -5,13 +5,14 @@ import type { Piece, PieceKind, SetDocument } from './document.ts';
 import { withoutLostSeats } from './seating.ts';
 
 const DUPLICATE_GAP_MM = 50;
+const HIGHEST_MARK = 999;
 
 /**
  * The next free mark of a kind: B1, B2 … for benches, T for tables, S sills, W bulkheads, O beams, L loose seats.
  *
  * @param document - the set
  * @param kind - kind of piece
- * @returns one more than the highest number in use
+ * @returns one more than the highest number in use, or the lowest free one when that would have four digits
  */
 export function nextMark(document: SetDocument, kind: PieceKind): string {
   const { letter } = definitionOf(kind);
@@ -19,7 +20,10 @@ export function nextMark(document: SetDocument, kind: PieceKind): string {
     .filter((piece) => piece.mark.startsWith(letter))
     .map((piece) => Number(piece.mark.slice(letter.length)))
     .filter(Number.isInteger);
-  return `${letter}${Math.max(0, ...used) + 1}`;
+  let next = Math.max(0, ...used) + 1;
+  if (next > HIGHEST_MARK) next = 1;
+  while (used.includes(next)) next += 1;
+  return `${letter}${next}`;
 }
 
 /**

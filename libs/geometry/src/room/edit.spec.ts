@@ -236,6 +236,22 @@ describe('parameters', () => {
     );
   });
 
+  it('let a bench grow away from the wall it stands at', () => {
+    const longer = setParameter(bayOf(), 'b1', 'lengthMm', 1500);
+    if (!longer.ok) throw new Error(longer.error.message);
+    const zs = footprint(pieceOf(longer.value, 'b1')).corners.map(([, z]) => z);
+    expect([Math.min(...zs), Math.max(...zs)]).toEqual([expect.closeTo(0, 6), expect.closeTo(1500, 6)]);
+    const free = setParameter(removePiece(bayOf(), 'w1'), 'b1', 'lengthMm', 1500);
+    expect(free.ok && pieceOf(free.value, 'b1').at).toEqual(pieceOf(bayOf(), 'b1').at);
+  });
+
+  it('do not move a locked piece', () => {
+    const document = bayOf();
+    const locked = { ...document, pieces: document.pieces.map((piece) => ({ ...piece, locked: true })) };
+    expect(setParameter(locked, 't1', 'at.xMm', 5)).toMatchObject({ ok: false, error: { key: 'at.xMm' } });
+    expect(setParameter(locked, 't1', 'heightMm', 750).ok).toBe(true);
+  });
+
   it('unseat whoever sat at a place that is gone', () => {
     const seated = seatSitter(bayOf(), 'b1', 2, CAST);
     const one = setParameter(seated, 'b1', 'places.count', 1);

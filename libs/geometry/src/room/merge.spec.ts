@@ -42,6 +42,7 @@ describe('diffDocuments', () => {
     const mine = set(set(start(), 'b1', 'seatDepthMm', 430), 'b1', 'lengthMm', 1300);
     const theirs = set(set(start(), 'b1', 'seatDepthMm', 460), 't1', 'heightMm', 750);
     expect(diffDocuments(start(), mine, theirs)).toEqual([
+      expect.objectContaining({ key: 'at', label: 'Position', changedBy: 'mine' }),
       expect.objectContaining({
         key: 'lengthMm',
         label: 'Length',
@@ -57,6 +58,7 @@ describe('diffDocuments', () => {
   it('calls every difference a conflict when the common version is lost', () => {
     const differences = diffDocuments(null, set(start(), 'b1', 'lengthMm', 1300), removePiece(start(), 's1'));
     expect(differences.map(({ id, conflict }) => [id, conflict])).toEqual([
+      ['piece:b1:at', true],
       ['piece:b1:lengthMm', true],
       ['piece:s1', true],
     ]);
@@ -141,7 +143,7 @@ describe('mergeDocuments', () => {
 
   it('gives the same whichever side is called mine, when nothing conflicts', () => {
     const edits: ((document: SetDocument) => SetDocument)[] = [
-      (one) => set(one, 'b1', 'lengthMm', 1400),
+      (one) => set(one, 'b1', 'seatDepthMm', 430),
       (one) => set(one, 'b1', 'seatCushion.thicknessMm', 80),
       (one) => set(one, 'b2', 'backHeightMm', 700),
       (one) => set(one, 't1', 'heightMm', 740),

@@ -3,7 +3,7 @@ import { normalTurnDeg, toPiece } from '../parts/placement.ts';
 import { benchLayout } from '../pieces/bench-layout.ts';
 import { insideCorners } from '../pieces/corners.ts';
 import type { PieceOf } from '../room/document.ts';
-import { area, clipped, clippedLine, extent, inFrame, type PlanOutline } from './plan.ts';
+import { clipped, clippedLine, extent, inFrame, type PlanOutline } from './plan.ts';
 import { planOfPiece, rectangleOf, solidsNear, type Survey, type SurveyedPlace } from './survey.ts';
 
 type Bench = PieceOf<'bench'>;
@@ -16,7 +16,6 @@ const FACING_GAP_MM = 2500;
 const SHARED_MM = 1;
 const TO_WALL_MM = 30;
 const PARALLEL_WITHIN_DEG = 3;
-const BLOCKED_FROM_MM2 = 1000;
 
 const benchesOf = (found: Survey) =>
   found.document.pieces.filter((piece): piece is Bench => piece.kind === 'bench');
@@ -122,7 +121,14 @@ function facing(found: Survey, bench: Bench, other: Bench): FacingSituation | un
     (piece) =>
       (piece.kind === 'bench' || piece.kind === 'bulkhead') && piece.id !== bench.id && piece.id !== other.id,
   );
-  if (blocking.some(({ outline }) => area(clipped(outline, between)) > BLOCKED_FROM_MM2)) return undefined;
+  // What only reaches in from the side, such as the third leg of a U, does not part the two.
+  const parts = blocking.some(({ outline }) => {
+    const inside = clipped(outline, between);
+    if (inside.length === 0) return false;
+    const [from, to] = extent(inside, 0);
+    return to - from > (right - left) / 2;
+  });
+  if (parts) return undefined;
   return {
     pieceIds: [bench.id, other.id],
     marks: [bench.mark, other.mark],
@@ -134,13 +140,21 @@ function facing(found: Survey, bench: Bench, other: Bench): FacingSituation | un
 /** Each place with the one most nearly opposite, when their centres lie within half a place of each other. */
 function oppositePlaces(bench: Bench, own: SurveyedPlace[], others: SurveyedPlace[]): [string, string][] {
   const x = (place: SurveyedPlace) => toPiece(bench.at, place.frame.hipMm)[0];
-  return own.flatMap((place): [string, string][] => {
-    const [nearest] = others
+  const nearest = (place: SurveyedPlace, candidates: SurveyedPlace[]) =>
+    candidates
       .map((other) => ({ other, aside: Math.abs(x(other) - x(place)) }))
       .filter(({ other, aside }) => aside <= Math.max(place.frame.widthMm, other.frame.widthMm) / 2)
-      .sort((a, b) => a.aside - b.aside);
-    return nearest === undefined ? [] : [[place.frame.placeId, nearest.other.frame.placeId]];
+      .sort((a, b) => a.aside - b.aside)[0]?.other.frame.placeId;
+  const pairs = own.flatMap((place): [string, string][] => {
+    const opposite = nearest(place, others);
+    return opposite === undefined ? [] : [[place.frame.placeId, opposite]];
   });
+  const met = new Set(pairs.map(([, opposite]) => opposite));
+  const rest = others.flatMap((place): [string, string][] => {
+    const opposite = met.has(place.frame.placeId) ? undefined : nearest(place, own);
+    return opposite === undefined ? [] : [[opposite, place.frame.placeId]];
+  });
+  return [...pairs, ...rest];
 }
 
 /** The bulkhead a bench stands against. */

@@ -353,6 +353,19 @@ describe('ways and what is round a place', () => {
     });
   });
 
+  it('faces the side benches of a U across its rear bench', () => {
+    const booth = ARRANGEMENTS.find(({ id }) => id === 'u-booth')?.build() ?? setOf();
+    const { facing, corners } = measureSet(booth);
+    // One place of 24 in and twice 9 in for the knees beyond the corners.
+    expect(facing).toMatchObject([{ marks: ['B2', 'B3'], gapMm: expect.closeTo(609.6 + 457.2, 6) }]);
+    expect(facing[0]?.pairs).toEqual([
+      ['b2:1', 'b3:2'],
+      ['b2:2', 'b3:1'],
+    ]);
+    expect(corners).toHaveLength(4);
+    for (const { centreFromFrontMm } of corners) expect(centreFromFrontMm).toBeGreaterThan(304.8 + 224);
+  });
+
   it('faces benches within 15 degrees and not through a third', () => {
     const opposite = (turnDeg: number) =>
       piece('bench', 'B2', [0, 2 * front + 600, turnDeg], { lengthMm: 1200 });
