@@ -269,6 +269,22 @@ describe('the private link to an order', () => {
     );
   });
 
+  it('takes no agreement to what was sent before the last time', async () => {
+    const { token, path } = await sendOrder('First form');
+    const read = (await open(token).expect(200)).body as { sentAt: string };
+    await answer(token, 'acknowledge', { name: 'Odile', sentAt: read.sentAt }).expect(200);
+    const order = (await as(test, owner).get(path).expect(200)).body as { upholsterer: { id: string } };
+    await as(test, owner).patch(path).send({ title: 'Second form' }).expect(200);
+    await as(test, owner).post(`${path}/send`).send({ upholstererId: order.upholsterer.id }).expect(200);
+    expect((await open(token).expect(200)).body).toMatchObject({
+      title: 'Second form',
+      acknowledgement: null,
+    });
+    const late = await answer(token, 'acknowledge', { name: 'Odile', sentAt: read.sentAt }).expect(409);
+    expect(late.body).toMatchObject({ code: 'order-sent-again' });
+    await answer(token, 'acknowledge', { name: 'Odile' }).expect(200);
+  });
+
   it('takes no answer to a cancelled order, but still shows it', async () => {
     const { token, path } = await sendOrder();
     await as(test, owner).post(`${path}/cancel`).send({}).expect(200);

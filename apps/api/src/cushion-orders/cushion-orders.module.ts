@@ -35,5 +35,6 @@ import { OrdersService } from './orders.service';
     OrderPaper,
     LinkService,
   ],
+  exports: [OrdersService, OrderCorrespondence, LinkService],
 })
 export class CushionOrdersModule {}

@@ -59,7 +59,7 @@ export class LinkController {
     @Body() body: AcknowledgeDto,
   ): Promise<PublicOrderDto> {
     await this.limitAnswers(token, request);
-    await this.links.acknowledge(token, body.name);
+    await this.links.acknowledge(token, body.name, body.sentAt);
     return this.views.public(await this.links.open(token));
   }
 

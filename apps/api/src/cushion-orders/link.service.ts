@@ -1,6 +1,6 @@
 import { HttpStatus, Injectable } from '@nestjs/common';
 import { InjectDataSource } from '@nestjs/typeorm';
-import { DataSource, type EntityManager } from 'typeorm';
+import { DataSource, type EntityManager, In } from 'typeorm';
 import { AuditService } from '../audit/audit.service';
 import { Problem } from '../common/problem';
 import { hashToken } from '../common/secret-token';
@@ -63,9 +63,15 @@ export class LinkService {
   }
 
   /** "I can make this as drawn": keeps the typed name, the time and the revision. A second time changes nothing. */
-  async acknowledge(token: string, name: string): Promise<void> {
+  async acknowledge(token: string, name: string, sentAt?: string): Promise<void> {
     await this.dataSource.transaction(async (manager) => {
       const order = await this.lock(token, manager);
+      if (sentAt !== undefined && Date.parse(sentAt) !== Date.parse(order.sent.at)) {
+        throw Problem.conflict(
+          'order-sent-again',
+          'The workshop sent this order again meanwhile. Read it anew first.',
+        );
+      }
       if (await acknowledgementOf(manager, order)) return;
       await recordEvent(
         manager,
@@ -145,12 +151,9 @@ export async function acknowledgementOf(
   manager: EntityManager,
   order: CushionOrder,
 ): Promise<OrderEvent | null> {
-  if (!order.sent) return null;
   const last = await manager.findOne(OrderEvent, {
-    where: { orderId: order.id, kind: 'acknowledged' },
+    where: { orderId: order.id, kind: In(['sent', 'acknowledged']) },
     order: { at: 'DESC' },
   });
-  const stands =
-    last !== null && last.at >= new Date(order.sent.at) && last.revisionLetter === order.sent.revisionLetter;
-  return stands ? last : null;
+  return last?.kind === 'acknowledged' ? last : null;
 }

@@ -100,4 +100,12 @@ export class AcknowledgeDto {
   @ApiProperty({ minLength: 1, maxLength: 120, description: 'the name of whoever agrees, typed' })
   @TextField({ min: 1, max: 120 })
   name: string;
+
+  @ApiPropertyOptional({
+    format: 'date-time',
+    description: '`sentAt` of the order that was read; refused when another was sent meanwhile',
+  })
+  @IsOptional()
+  @IsISO8601({ strict: true })
+  sentAt?: string;
 }
