@@ -58,7 +58,7 @@ const tableBase: fc.Arbitrary<PieceOf<'table'>['base']> = fc.oneof(
 );
 
 /** Tables of every base. */
-export const anyTable: fc.Arbitrary<PieceOf<'table'>> = fc
+const anyTable: fc.Arbitrary<PieceOf<'table'>> = fc
   .record({
     at,
     lengthMm: mm(650, 4000),

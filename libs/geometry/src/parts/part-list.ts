@@ -4,7 +4,7 @@ import type { MaterialKey, Part, PartRole, Solid, Vec3 } from './part.ts';
 import { placer } from './placement.ts';
 
 /** A box before it is placed: its size and centre in the piece's frame. */
-export interface BoxInPiece {
+interface BoxInPiece {
   sizeMm: Vec3;
   centreMm: Vec3;
   /** About the piece's x axis; negative lifts the front. */

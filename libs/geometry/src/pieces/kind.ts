@@ -54,7 +54,7 @@ export interface Envelope {
 }
 
 /** What a piece starts from. */
-export type CommonFields = Pick<
+type CommonFields = Pick<
   PieceOf<'bench'>,
   'id' | 'mark' | 'name' | 'at' | 'accessible' | 'locked' | 'note'
 >;

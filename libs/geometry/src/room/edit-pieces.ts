@@ -124,7 +124,13 @@ export function movePiece(document: SetDocument, pieceId: string, to: Partial<Pi
   return withoutLostSeats({ ...document, pieces });
 }
 
-/** Id made from a mark; `b3`, or `b3-2` when that is taken. */
+/**
+ * An id made from a mark: `b3`, or `b3-2` when that is taken.
+ *
+ * @param document - the set
+ * @param mark - mark of the piece
+ * @returns an id no piece of the set has
+ */
 export function freeId(document: SetDocument, mark: string): string {
   const taken = new Set(document.pieces.map((piece) => piece.id));
   const base = mark.toLowerCase();

@@ -4,7 +4,7 @@ import { area, clipped, extent, inFrame, type PlanSolid } from './plan.ts';
 import { rectangleOf, solidsNear, type Survey, type SurveyedPlace } from './survey.ts';
 
 /** Width of the strip over the lap that belongs to one sitter, millimetres. */
-export const LAP_STRIP_MM = 520;
+const LAP_STRIP_MM = 520;
 /** The strip ends this far before the seat front, a little beyond the longest knees. */
 const LAP_AHEAD_MM = 300;
 /** Obstructions further than this from the table edge are in nobody's way. */

@@ -1,7 +1,7 @@
 import type { Part } from '../parts/part.ts';
 
 /** A point seen from above: two level axes, millimetres. */
-export type PlanPoint = readonly [number, number];
+type PlanPoint = readonly [number, number];
 
 /** A convex outline seen from above. */
 export type PlanOutline = readonly PlanPoint[];

@@ -5,7 +5,7 @@ import type { Piece, PieceOf, SetDocument } from '../room/document.ts';
 import { inFrame, planSolid, type PlanFrame, type PlanOutline, type PlanSolid } from './plan.ts';
 
 /** A piece with its parts as clearances see them. */
-export interface SurveyedPiece {
+interface SurveyedPiece {
   piece: Piece;
   solids: PlanSolid[];
   /** Circle around the outlines of all parts. */
