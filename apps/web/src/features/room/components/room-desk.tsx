@@ -8,7 +8,7 @@ import { usePieceActions } from '../hooks/use-piece-actions.ts';
 import { useRoomCells } from '../hooks/use-room-cells.ts';
 import { useSavedCell } from '../hooks/use-saved-cell.ts';
 import { useShortcuts, type ShortcutActions } from '../hooks/use-shortcuts.ts';
-import { useAutosave, usePicture, useSurroundings } from '../room-context.tsx';
+import { RoomContext, useAutosave, usePicture, useSurroundings } from '../room-context.tsx';
 import { useRoomStore, useUndo } from '../store.ts';
 import { ConflictScreen } from './conflict-screen.tsx';
 import { EmptySet } from './empty-set.tsx';
@@ -29,7 +29,8 @@ interface Props {
 
 /** The room itself, once everything is there. */
 export function RoomDesk({ lastRevision, foot, aboutPiece }: Props) {
-  const { canEdit, setName } = useSurroundings();
+  const surroundings = useSurroundings();
+  const { canEdit, setName } = surroundings;
   const autosave = useAutosave();
   const { save } = useStore(autosave.state);
   const picture = usePicture();
@@ -65,67 +66,74 @@ export function RoomDesk({ lastRevision, foot, aboutPiece }: Props) {
     address.openFit(true);
   };
   const empty = document.pieces.length === 0;
+  const { clientView } = address;
+  // Shown to a client, the room can be looked at and not changed.
+  const shown = clientView ? { ...surroundings, canEdit: false } : surroundings;
 
   return (
-    <div className="flex min-h-0 flex-1 flex-col tablet:h-[calc(100dvh-3.5rem)] tablet:flex-none">
-      <h1 className="sr-only" tabIndex={-1} data-page-heading>
-        {setName}
-      </h1>
-      <div className="mx-auto grid min-h-0 w-full max-w-[90rem] flex-1 gap-x-10 px-8 pt-4 max-tablet:px-4 max-tablet:pt-2 tablet:grid-cols-[15rem_minmax(0,1fr)]">
-        <div className="flex min-h-0 min-w-0 flex-col gap-2 max-tablet:order-1 tablet:order-2">
-          {save.kind === 'refused' && (
-            <Notice tone="wont" title="The draft was not taken">
-              {save.message} Your changes stay on this device.
-            </Notice>
-          )}
-          {empty ? (
-            <EmptySet document={document} actions={actions} onSelect={address.select} />
-          ) : (
-            <>
-              <SceneStage
-                picture={picture}
-                piece={piece}
-                address={address}
-                actions={actions}
-                onOpenCell={openCell}
-              />
-              {!address.fitOpen &&
-                (piece ? (
-                  <div className="pb-4">
-                    <SpecSentence key={piece.id} piece={piece} />
-                  </div>
-                ) : (
-                  <p className="ruled pt-3 pb-5 text-lg text-ink-2">
-                    Select a piece in the drawing or in the list to read and change its sizes.
-                  </p>
-                ))}
-            </>
-          )}
+    <RoomContext value={shown}>
+      <div className="flex min-h-0 flex-1 flex-col tablet:h-[calc(100dvh-3.5rem)] tablet:flex-none">
+        <h1 className="sr-only" tabIndex={-1} data-page-heading>
+          {setName}
+        </h1>
+        <div className="mx-auto grid min-h-0 w-full max-w-[90rem] flex-1 gap-x-10 px-8 pt-4 max-tablet:px-4 max-tablet:pt-2 tablet:grid-cols-[15rem_minmax(0,1fr)]">
+          <div className="flex min-h-0 min-w-0 flex-col gap-2 max-tablet:order-1 tablet:order-2">
+            {save.kind === 'refused' && (
+              <Notice tone="wont" title="The draft was not taken">
+                {save.message} Your changes stay on this device.
+              </Notice>
+            )}
+            {empty ? (
+              <EmptySet document={document} actions={actions} onSelect={address.select} />
+            ) : (
+              <>
+                <SceneStage
+                  picture={picture}
+                  piece={piece}
+                  address={address}
+                  actions={actions}
+                  onOpenCell={openCell}
+                />
+                {!address.fitOpen &&
+                  (piece ? (
+                    <div className="pb-4">
+                      <SpecSentence key={piece.id} piece={piece} />
+                    </div>
+                  ) : (
+                    <p className="ruled pt-3 pb-5 text-lg text-ink-2">
+                      Select a piece in the drawing or in the list to read and change its sizes.
+                    </p>
+                  ))}
+              </>
+            )}
+          </div>
+          <aside
+            aria-label="Pieces, plan and notes"
+            className="flex min-h-0 flex-col gap-5 pb-6 max-tablet:order-2 max-tablet:pt-6 tablet:order-1 tablet:overflow-y-auto tablet:pr-1"
+          >
+            <PiecesPanel
+              document={document}
+              selectedPieceId={address.pieceId}
+              onSelect={address.select}
+              actions={actions}
+              aboutPiece={aboutPiece}
+            />
+            {!empty && <KeyPlan picture={picture} address={address} />}
+            <KnownDifferences document={document} onReplace={actions.replace} />
+            {canEdit && !empty && !clientView && (
+              <IssueRevision sheet={picture.sheet} lastLetter={lastRevision} />
+            )}
+            {!clientView && <NotesPanel piece={piece} pieces={document.pieces} parts={picture.parts} />}
+            <p>
+              <Button look="word" onClick={() => setHelpOpen(true)}>
+                Keys
+              </Button>
+            </p>
+          </aside>
         </div>
-        <aside
-          aria-label="Pieces, plan and notes"
-          className="flex min-h-0 flex-col gap-5 pb-6 max-tablet:order-2 max-tablet:pt-6 tablet:order-1 tablet:overflow-y-auto tablet:pr-1"
-        >
-          <PiecesPanel
-            document={document}
-            selectedPieceId={address.pieceId}
-            onSelect={address.select}
-            actions={actions}
-            aboutPiece={aboutPiece}
-          />
-          {!empty && <KeyPlan picture={picture} address={address} />}
-          <KnownDifferences document={document} onReplace={actions.replace} />
-          {canEdit && !empty && <IssueRevision sheet={picture.sheet} lastLetter={lastRevision} />}
-          <NotesPanel piece={piece} pieces={document.pieces} parts={picture.parts} />
-          <p>
-            <Button look="word" onClick={() => setHelpOpen(true)}>
-              Keys
-            </Button>
-          </p>
-        </aside>
+        {!clientView && foot}
+        <KeysDialog open={helpOpen} onClose={() => setHelpOpen(false)} />
       </div>
-      {!address.clientView && foot}
-      <KeysDialog open={helpOpen} onClose={() => setHelpOpen(false)} />
-    </div>
+    </RoomContext>
   );
 }

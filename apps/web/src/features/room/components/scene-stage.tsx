@@ -47,7 +47,13 @@ export function SceneStage({ picture, piece, address, actions, onOpenCell }: Pro
   const { view: letter, clientView } = address;
   const settled = maker.picture(useRoom((state) => state.document));
   const view = useView(settled, letter, address.pieceId, sheet);
-  const hand = useSceneHand({ picture, view, letter, onSelect: address.select });
+  const hand = useSceneHand({
+    picture,
+    view,
+    letter,
+    selectedPieceId: address.pieceId,
+    onSelect: address.select,
+  });
 
   const tapes = useMemo(
     () => tapeLines(picture.document, picture.sheet, address.pieceId, picture.bodies),

@@ -22,6 +22,8 @@ interface Drag {
   moving: boolean;
   /** The piece in the hand; without one the sheet itself is moved. */
   piece: Piece | undefined;
+  /** True when nothing was hit: a click there lets go of the selection. */
+  onPaper: boolean;
   base: SetDocument;
   floor: { xMm: number; zMm: number } | undefined;
 }
@@ -31,9 +33,10 @@ export function useSceneHand(options: {
   picture: RoomPicture;
   view: View;
   letter: ViewLetter;
+  selectedPieceId: string | undefined;
   onSelect: (pieceId: string | undefined) => void;
 }) {
-  const { picture, view, letter, onSelect } = options;
+  const { picture, view, letter, selectedPieceId, onSelect } = options;
   const store = useRoomStore();
   const { canEdit } = useSurroundings();
   const drag = useRef<Drag | null>(null);
@@ -52,6 +55,12 @@ export function useSceneHand(options: {
     return frame && rayThrough(frame, view.controller.viewport(), x, y);
   }
 
+  /** A finger that scrolls must not carry furniture along: it moves only what was selected before. */
+  function mayMove(piece: Piece, pointerType: string): boolean {
+    if (!canEdit || piece.locked || piece.kind === 'bulkhead') return false;
+    return pointerType !== 'touch' || piece.id === selectedPieceId;
+  }
+
   function down(event: PointerEvent<HTMLElement>) {
     if (event.button !== 0 || event.target instanceof HTMLButtonElement) return;
     const { x, y } = at(event);
@@ -67,12 +76,13 @@ export function useSceneHand(options: {
       lastX: x,
       lastY: y,
       moving: false,
-      piece: canEdit && piece && !piece.locked && piece.kind !== 'bulkhead' ? piece : undefined,
+      piece: piece && mayMove(piece, event.pointerType) ? piece : undefined,
+      onPaper: pieceId === undefined,
       base: store.getState().document,
       floor: onLevel(ray, 0),
     };
     event.currentTarget.setPointerCapture(event.pointerId);
-    onSelect(pieceId);
+    if (pieceId !== undefined) onSelect(pieceId);
   }
 
   /** Where the piece would stand: over the floor where it is seen from above, else along the sheet. */
@@ -121,6 +131,7 @@ export function useSceneHand(options: {
       store.getState().commit(wanted.current, `${hand.piece.mark} moved`);
       announce(`${hand.piece.mark} moved`);
     }
+    if (hand?.onPaper && !hand.moving) onSelect(undefined);
     wanted.current = null;
   }
 

@@ -112,7 +112,7 @@ export function Overlay(props: Props) {
   }, [layOut]);
 
   return (
-    <div ref={layer} className="pointer-events-none absolute inset-0 overflow-hidden">
+    <div ref={layer} data-overlay className="pointer-events-none absolute inset-0 overflow-hidden">
       <svg className="tape absolute inset-0 size-full" aria-hidden="true" fill="none">
         {bodies.map((body) => (
           <path key={body.placeId} data-leader={body.placeId} className="stroke-ink-2" strokeWidth="0.9" />
@@ -139,14 +139,21 @@ export function Overlay(props: Props) {
           tabIndex={-1}
           data-name={body.placeId}
           onClick={() => onSelectPiece(body.pieceId)}
-          className="pointer-events-auto absolute top-0 left-0 px-0.5 text-[0.84rem] leading-5 whitespace-nowrap [text-shadow:0_0_3px_var(--color-paper),0_0_6px_var(--color-paper)]"
+          className={classNames(
+            'pointer-events-auto absolute top-0 left-0 rounded-sm px-1 text-[0.84rem] leading-5 whitespace-nowrap',
+            namesAtHeads
+              ? 'bg-sheet/85'
+              : '[text-shadow:0_0_3px_var(--color-paper),0_0_6px_var(--color-paper)]',
+          )}
         >
           <strong className="font-semibold">{shortName(body.name)}</strong>
-          <span className="text-ink-2 max-phone:hidden">
-            {' '}
-            <Measure text={formatLength(body.statureMm, { ...style, feet: true })} />
-            {body.estimated && ', est.'}
-          </span>
+          {!namesAtHeads && (
+            <span className="text-ink-2 max-phone:hidden">
+              {' '}
+              <Measure text={formatLength(body.statureMm, { ...style, feet: true })} />
+              {body.estimated && ', est.'}
+            </span>
+          )}
         </button>
       ))}
       {tapes.map((tape) => (
@@ -154,7 +161,7 @@ export function Overlay(props: Props) {
           key={tape.id}
           data-flag={tape.id}
           className={classNames(
-            'pointer-events-auto absolute top-0 left-0',
+            'pointer-events-auto absolute top-0 left-0 focus-within:z-20',
             someLit && tape.cellId !== litCellId && 'opacity-50',
           )}
         >

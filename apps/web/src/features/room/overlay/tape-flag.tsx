@@ -95,6 +95,7 @@ function EditableFlag({
   const edit = useNumberEdit(parameter, style, change, { left: () => setBack(true) });
   const slipId = useId();
   const selectAll = useRef(true);
+  const slip = useRef<HTMLDivElement>(null);
 
   function begin(text?: string) {
     selectAll.current = text === undefined;
@@ -107,6 +108,7 @@ function EditableFlag({
       if (selectAll.current) field.current?.select();
     } else if (back) button.current?.focus({ preventScroll: true });
     onLayout();
+    if (slip.current) keepOnSheet(slip.current);
   }, [edit.editing, back, onLayout]);
 
   if (!edit.editing) {
@@ -167,7 +169,10 @@ function EditableFlag({
         style={{ width: `${Math.max(4, edit.text.length + 1)}ch` }}
         className="bg-transparent text-center font-semibold outline-2 outline-transparent focus-visible:shadow-none"
       />
-      <div className="absolute top-full left-1/2 z-20 mt-2 w-64 -translate-x-1/2 rounded-md bg-sheet p-3 whitespace-normal text-ink shadow-slip">
+      <div
+        ref={slip}
+        className="absolute top-full left-1/2 z-20 mt-2 w-64 rounded-md bg-sheet p-3 whitespace-normal text-ink shadow-slip"
+      >
         <NumberSlip
           id={slipId}
           pieceId={pieceId}
@@ -179,4 +184,16 @@ function EditableFlag({
       </div>
     </div>
   );
+}
+
+/** Centres the slip under its flag, moved as far as it takes to stay on the sheet. */
+function keepOnSheet(slip: HTMLElement) {
+  slip.style.transform = 'translateX(-50%)';
+  const sheet = slip.closest('[data-overlay]')?.getBoundingClientRect();
+  if (!sheet) return;
+  const box = slip.getBoundingClientRect();
+  const aside = Math.max(0, sheet.left + 4 - box.left) - Math.max(0, box.right + 4 - sheet.right);
+  const flag = slip.parentElement?.offsetHeight ?? 0;
+  const above = box.bottom > sheet.bottom ? -(box.height + flag + 16) : 0;
+  slip.style.transform = `translate(calc(-50% + ${aside}px), ${above}px)`;
 }
