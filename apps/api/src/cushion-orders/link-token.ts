@@ -1,6 +1,6 @@
 const TOKEN_FORM = /^[A-Za-z0-9_-]{43}$/;
 
-export const LINK_DAYS = 60;
+const LINK_DAYS = 60;
 
 export function isLinkToken(text: string): boolean {
   return TOKEN_FORM.test(text);

@@ -178,7 +178,7 @@ function drawFoot(
   paragraph(sheet, sink, barX, at.top + 19.2, CHECK_BAR_MM);
 }
 
-export function headMarks({ marks }: SpecCushion): string {
+function headMarks({ marks }: SpecCushion): string {
   if (marks.length === 1) return marks[0] ?? '';
   if (marks.length <= 4) return `${marks.slice(0, -1).join(', ')} and ${marks.at(-1)}`;
   return `${marks[0]} to ${marks.at(-1)} (${marks.length})`;

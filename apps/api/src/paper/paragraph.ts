@@ -3,7 +3,7 @@ import { leading, type Sheet, type TextStyle } from './sheet';
 import type { Weight } from './work-sans';
 
 /** A stretch of text in one weight. */
-export interface Run {
+interface Run {
   text: string;
   weight?: Weight;
 }

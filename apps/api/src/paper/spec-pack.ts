@@ -21,7 +21,7 @@ export interface DatumLine {
 }
 
 /** Where the buttons of a cushion stand. */
-export interface ButtonPlan {
+interface ButtonPlan {
   /** From the cushion's own seam on the datum's side, rising. */
   columnsMm: readonly number[];
   /** From the back seam (of a back cushion: the top seam), rising. */
@@ -63,7 +63,7 @@ export interface SpecCushion {
 }
 
 /** The words of the order that stand on every pack. */
-export interface SpecWords {
+interface SpecWords {
   cover: string;
   foam: string;
   welt: string;

@@ -1,8 +1,8 @@
 import { breakLines } from './paragraph';
 import { leading, PEN, type Sheet } from './sheet';
 
-export const MARGIN_MM = 9;
-export const TITLE_BLOCK_MM = 18;
+const MARGIN_MM = 9;
+const TITLE_BLOCK_MM = 18;
 
 export interface TitleCell {
   label: string;

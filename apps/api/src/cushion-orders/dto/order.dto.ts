@@ -6,7 +6,7 @@ import { ORDER_STATES, type OrderState, RECORDED_STATES, type RecordedState } fr
 import { CushionDto } from './cushion.dto';
 import { OrderSpecDto } from './order-spec.dto';
 
-export const LINK_STATES = ['none', 'valid', 'expired', 'revoked'] as const;
+const LINK_STATES = ['none', 'valid', 'expired', 'revoked'] as const;
 export type LinkState = (typeof LINK_STATES)[number];
 
 export class OrderEventDto {
