@@ -15,5 +15,7 @@ export default defineConfig({
     environment: 'jsdom',
     setupFiles: ['src/test/setup.ts'],
     css: false,
+    // Whole forms are filled in; a busy machine needs longer than the usual five seconds.
+    testTimeout: 20_000,
   },
 });

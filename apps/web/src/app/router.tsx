@@ -3,7 +3,6 @@ import { LoadingLine } from '@/components/loading.tsx';
 import { ErrorPage } from './error-page.tsx';
 import { HomeRedirect } from './home-redirect.tsx';
 import { NotFoundPage } from './not-found-page.tsx';
-import { Shell } from './shell.tsx';
 
 const Opening = () => (
   <div className="page">
@@ -30,7 +29,7 @@ export const router = createBrowserRouter([
       },
       { path: '/order/:token', lazy: () => import('@/routes/upholsterer.tsx') },
       {
-        Component: Shell,
+        lazy: async () => ({ Component: (await import('./shell.tsx')).Shell }),
         ErrorBoundary: ErrorPage,
         children: [
           { path: '/', Component: HomeRedirect },

@@ -4,6 +4,7 @@ import { LoadingLine } from '@/components/loading.tsx';
 import { useSession } from '@/lib/session.ts';
 import { ConnectionBar } from './connection-bar.tsx';
 import { RouteFocus } from './route-focus.tsx';
+import { Toasts } from './toasts.tsx';
 import { TitleBlock } from './title-block.tsx';
 import { useHome } from './use-home.ts';
 
@@ -50,6 +51,7 @@ export function Shell() {
       </main>
       <RouteFocus />
       <ScrollRestoration />
+      <Toasts />
     </div>
   );
 }

@@ -1,22 +1,13 @@
 import { Menu } from '@/components/menu.tsx';
 import {
   choosePersonalUnits,
+  UNIT_CHOICES,
   UNIT_WORDS,
-  type UnitStyle,
+  unitChoiceId,
   useUnitChoice,
   useUnitStyle,
 } from '@/lib/unit-choice.ts';
 import { CELL, CellFace, PRESSABLE } from './title-cell.tsx';
-
-const STYLES: readonly { style: UnitStyle; words: string }[] = [
-  { style: { system: 'feet-inches', roundTo: 8 }, words: 'Feet, inches, to ⅛' },
-  { style: { system: 'feet-inches', roundTo: 16 }, words: 'Feet, inches, to 1/16' },
-  { style: { system: 'decimal-inches', roundTo: 8 }, words: 'Decimal inches' },
-  { style: { system: 'millimetres', roundTo: 8 }, words: 'Millimetres' },
-];
-
-const same = (a: UnitStyle | null, b: UnitStyle) =>
-  a?.system === b.system && (b.system !== 'feet-inches' || a.roundTo === b.roundTo);
 
 /** Units of the open production, with a person's own choice above it. */
 export function UnitsCell() {
@@ -38,10 +29,10 @@ export function UnitsCell() {
             chosen: personal === null,
             onPress: () => choosePersonalUnits(null),
           },
-          ...STYLES.map((entry) => ({
-            id: entry.words,
+          ...UNIT_CHOICES.map((entry) => ({
+            id: entry.id,
             words: entry.words,
-            chosen: same(personal, entry.style),
+            chosen: unitChoiceId(personal) === entry.id,
             onPress: () => choosePersonalUnits(entry.style),
           })),
         ]}

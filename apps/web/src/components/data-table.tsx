@@ -104,7 +104,7 @@ export function DataTable<Row extends RowData>({
       {(filterLabel !== undefined || tools !== undefined) && (
         <div className="mb-3 flex flex-wrap items-center justify-between gap-3">
           {filterLabel !== undefined && (
-            <label className="flex h-10 min-w-0 flex-1 items-center gap-2 border-b-[1.5px] border-rule-strong text-ink-2 focus-within:border-chalk tablet:max-w-xs">
+            <label className="flex h-10 min-w-0 flex-1 items-center gap-2 border-b-[1.5px] border-rule-strong text-ink-2 focus-within:border-chalk tablet:max-w-80">
               <SearchIcon />
               <span className="sr-only">{filterLabel}</span>
               <input

@@ -20,7 +20,7 @@ export interface ControlProps {
 
 /** The line a field sits on: chalk when it has the focus, brick when it could not be read. */
 export const FIELD_LINE =
-  'quick block w-full rounded-t-sm border-0 border-b-[1.5px] border-rule-strong bg-sheet px-3 text-[1.0625rem] text-ink ' +
+  'quick block w-full rounded-t-sm border-0 border-b-[1.5px] border-rule-strong bg-sheet px-3 in-[[role=dialog]]:bg-paper text-[1.0625rem] text-ink ' +
   'hover:border-ink focus:border-chalk focus:bg-chalk-wash focus:shadow-[inset_0_-1.5px_0_var(--color-chalk)] focus:outline-2 focus:outline-transparent ' +
   'aria-invalid:border-wont aria-invalid:bg-wont-wash aria-invalid:shadow-[inset_0_-1.5px_0_var(--color-wont)] ' +
   'disabled:border-rule disabled:bg-transparent disabled:text-ink-2';

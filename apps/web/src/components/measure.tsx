@@ -40,14 +40,15 @@ export function splitFractions(text: string): Piece[] {
   return pieces;
 }
 
-/** The same length as somebody would type it: 17 1/2″. */
+/** The same length as somebody would type it, with plain spaces: 17 1/2″. */
 export function typedForm(text: string): string {
   return splitFractions(text)
     .map((piece, index, all) => {
       if (!piece.fraction) return piece.text;
       return /\d$/.test(all[index - 1]?.text ?? '') ? ` ${piece.text}` : piece.text;
     })
-    .join('');
+    .join('')
+    .replace(/[\u00a0\u202f]/g, ' ');
 }
 
 interface MeasureProps {

@@ -1,32 +1,24 @@
-import type { BodyData, Clothing, FitSheet, TapeMeasureKey, Verdict } from '@settlewright/anthropometry';
+import type { TapeMeasureKey } from '@settlewright/anthropometry';
 import type { SetDocument } from '@settlewright/geometry';
+import type { components } from './api-types.ts';
+
+/** What the server sends, by the names the pages use. The types themselves are generated from the API. */
+type Schema = components['schemas'];
 
 /** What a member may do in a workshop. */
-export type Role = 'owner' | 'designer' | 'carpenter' | 'reviewer';
-
-export type UnitSystem = 'feet-inches' | 'decimal-inches' | 'millimetres';
-export type RoundTo = 8 | 16;
-
-export interface Session {
-  accessToken: string;
-  expiresInSeconds: number;
-  user: SessionUser;
-  workshops: Membership[];
-}
-
-export interface SessionUser {
-  id: string;
-  name: string;
-  email: string;
-  emailConfirmed: boolean;
-}
-
-export interface Membership {
-  id: string;
-  name: string;
-  role: Role;
-  isDemo: boolean;
-}
+export type Role = Schema['Role'];
+export type Session = Schema['SessionDto'];
+export type SessionUser = Schema['UserDto'];
+export type Membership = Schema['WorkshopOfUserDto'];
+export type Workshop = Schema['WorkshopDto'];
+export type Member = Schema['MemberDto'];
+export type Invitation = Schema['InvitationDto'];
+/** What the holder of an invitation sees before joining. */
+export type InvitationOffer = Schema['OpenInvitationDto'];
+export type Upholsterer = Schema['UpholstererDto'];
+export type Production = Schema['ProductionDto'];
+export type UnitSystem = Production['units'];
+export type RoundTo = Production['roundTo'];
 
 export interface Page<T> {
   items: T[];
@@ -35,131 +27,25 @@ export interface Page<T> {
   pageSize: number;
 }
 
-export interface Workshop {
-  id: string;
-  name: string;
-  telephone: string;
-  paper: 'a4' | 'letter';
-  timeZone: string;
-}
-
-export interface Member {
-  userId: string;
-  name: string;
-  /** Only the owner receives it. */
-  email?: string;
-  role: Role;
-  joinedAt: string;
-}
-
-export interface Invitation {
-  id: string;
-  email: string;
-  role: Role;
-  expiresAt: string;
-  createdAt: string;
-}
-
-/** What the holder of an invitation sees before joining. */
-export interface InvitationOffer {
-  workshopName: string;
-  invitedByName: string;
-  email: string;
-  role: Role;
-  expiresAt: string;
-  /** True: the password of that account is asked; false: a name and a new password. */
-  accountExists: boolean;
-}
-
-export interface Upholsterer {
-  id: string;
-  name: string;
-  contactName: string;
-  email: string;
-  telephone: string;
-  notes: string;
-}
-
-export interface Production {
-  id: string;
-  name: string;
-  summary: string;
-  units: UnitSystem;
-  roundTo: RoundTo;
-  status: 'active' | 'archived';
-  createdAt: string;
-  updatedAt: string;
-}
-
 export interface TapeReading {
   mm: number;
   takenBy?: string;
   takenOn?: string;
 }
 
-/** Carpenter and reviewer receive only the first four. */
-export interface CastMember {
-  id: string;
-  name: string;
-  role: string;
-  colour: number;
-  bodyData?: BodyData;
-  statureMm?: number;
-  statureSource?: 'measured' | 'told';
-  weightKg?: number;
-  measured?: Partial<Record<TapeMeasureKey, TapeReading>>;
-  shoeMm?: number;
-  clothing?: Clothing;
-  notes?: string;
-  createdAt?: string;
-  /** The person was erased and still holds a place in a draft. */
-  removed?: boolean;
-}
+/** Carpenter and reviewer receive the first part only. */
+export type CastMember = Schema['CastNameDto'] &
+  Partial<Omit<Schema['CastMemberDto'], keyof Schema['CastNameDto'] | 'measured'>> & {
+    measured?: Partial<Record<TapeMeasureKey, TapeReading>>;
+  };
 
-export interface ImportProblem {
-  column: string;
-  read: string;
-  accepted: string;
-  message: string;
-}
+export type ImportRow = Schema['CastImportRowDto'];
+export type ImportPreview = Schema['CastImportPreviewDto'];
+export type ImportResult = Schema['CastImportDto'];
 
-export interface ImportRow {
-  /** Line of the file; the header stands on line 1. */
-  line: number;
-  /** Absent when the row cannot be taken. */
-  value?: Pick<CastMember, 'name' | 'role' | 'statureMm' | 'statureSource' | 'weightKg' | 'measured'>;
-  problems: ImportProblem[];
-  /** Worth a look; the row is taken all the same. */
-  warnings: ImportProblem[];
-}
-
-export interface ImportPreview {
-  columns: { header: string; key: string; unit?: string }[];
-  rows: ImportRow[];
-  ignoredColumns: string[];
-}
-
-export interface RevisionSummary {
-  letter: string;
-  number: number;
-  issuedAt: string;
-  note: string;
-  approval?: { decision: 'approved' | 'changes-wanted' };
-}
-
-export interface SetSummary {
-  id: string;
-  name: string;
-  status: 'active' | 'archived';
-  draftNumber: number;
-  savedAt: string;
-  lastRevision?: RevisionSummary;
-  pieceCount: number;
-  seatedCount: number;
-  /** Verdicts of the draft; absent when they could not be made. */
-  counts?: Record<Verdict, number>;
-  document: SetDocument;
-}
+/** The document travels as plain JSON; the geometry library says what it is. */
+export type SetSummary = Omit<Schema['SetDto'], 'document'> & { document: SetDocument };
+export type Draft = Omit<Schema['DraftDto'], 'document'> & { document: SetDocument };
 
 export type OrderState =
   | 'draft'
@@ -187,12 +73,3 @@ export interface OrderSummary {
   openQuestions: number;
   updatedAt: string;
 }
-
-export interface Draft {
-  number: number;
-  document: SetDocument;
-  savedAt: string;
-  savedBy: { id: string; name: string };
-}
-
-export type { FitSheet, SetDocument, Verdict };

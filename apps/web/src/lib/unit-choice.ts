@@ -55,3 +55,19 @@ export const UNIT_WORDS: Record<UnitSystem, string> = {
   'decimal-inches': 'decimal inches',
   millimetres: 'millimetres',
 };
+
+/** What a person may choose, with its words. */
+export const UNIT_CHOICES: readonly { id: string; style: UnitStyle; words: string }[] = [
+  { id: 'feet-inches-8', style: { system: 'feet-inches', roundTo: 8 }, words: 'Feet, inches, to 1/8' },
+  { id: 'feet-inches-16', style: { system: 'feet-inches', roundTo: 16 }, words: 'Feet, inches, to 1/16' },
+  { id: 'decimal-inches', style: { system: 'decimal-inches', roundTo: 8 }, words: 'Decimal inches' },
+  { id: 'millimetres', style: { system: 'millimetres', roundTo: 8 }, words: 'Millimetres' },
+];
+
+/** The entry of `UNIT_CHOICES` a style stands for. */
+export function unitChoiceId(style: UnitStyle | null): string | undefined {
+  return UNIT_CHOICES.find(
+    ({ style: { system, roundTo } }) =>
+      system === style?.system && (system !== 'feet-inches' || roundTo === style.roundTo),
+  )?.id;
+}

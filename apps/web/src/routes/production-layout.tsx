@@ -11,6 +11,7 @@ import { useWorkshop } from '@/lib/workshop.ts';
 
 function ProductionFrame({ production, workshopId }: { production: Production; workshopId: string }) {
   const home = `/w/${workshopId}/p/${production.id}`;
+  const { setId } = useParams();
   const cells = useMemo<TitleCell[]>(
     () => [
       {
@@ -20,13 +21,14 @@ function ProductionFrame({ production, workshopId }: { production: Production; w
         label: production.status === 'archived' ? 'Production, archived' : 'Production',
         value: production.name,
         name: `Production: ${production.name}, menu`,
+        phone: setId === undefined,
         menu: [
           { id: 'page', words: 'Sets and orders', to: home },
           { id: 'people', words: 'People', to: `${home}/people` },
         ],
       },
     ],
-    [home, production.name, production.status],
+    [home, production.name, production.status, setId],
   );
   useTitleCells(cells);
 

@@ -9,7 +9,9 @@ globalThis.ResizeObserver ??= class {
   unobserve() {}
   disconnect() {}
 };
-Element.prototype.scrollIntoView ??= () => {};
+if (!('scrollIntoView' in Element.prototype)) {
+  Object.assign(Element.prototype, { scrollIntoView: () => undefined });
+}
 
 beforeAll(() => server.listen({ onUnhandledRequest: 'error' }));
 afterEach(() => {

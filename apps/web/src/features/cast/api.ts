@@ -1,7 +1,7 @@
 import { useMutation, useQuery, useQueryClient } from '@tanstack/react-query';
 import type { TapeMeasureKey } from '@settlewright/anthropometry';
 import { api } from '@/lib/api-client.ts';
-import type { CastMember, ImportPreview, ImportRow, Page, TapeReading } from '@/lib/contract.ts';
+import type { CastMember, ImportPreview, ImportResult, Page, TapeReading } from '@/lib/contract.ts';
 import { productionKey, productionPath } from '@/lib/production.ts';
 
 /** What is sent to add or change a person; null clears a value. */
@@ -17,12 +17,6 @@ export interface CastInput {
   clothing: NonNullable<CastMember['clothing']>;
   notes: string;
   colour?: number;
-}
-
-export interface ImportResult {
-  added: number;
-  refused: number;
-  refusedRows: ImportRow[];
 }
 
 export interface CastPlace {

@@ -51,7 +51,7 @@ function useChange<Input, Answer = void>(
 }
 
 export const useSaveSettings = (workshopId: string) =>
-  useChange(workshopId, 'settings', (input: Omit<Workshop, 'id'>) =>
+  useChange(workshopId, 'settings', (input: Pick<Workshop, 'name' | 'telephone' | 'paper' | 'timeZone'>) =>
     api.patch<Workshop>(path(workshopId), input),
   );
 
@@ -71,7 +71,7 @@ export const useInvite = (workshopId: string) =>
 export const useWithdrawInvitation = (workshopId: string) =>
   useChange(workshopId, 'invitations', (id: string) => api.delete(`${path(workshopId)}/invitations/${id}`));
 
-export type UpholstererInput = Omit<Upholsterer, 'id'>;
+export type UpholstererInput = Omit<Upholsterer, 'id' | 'createdAt'>;
 
 export const useSaveUpholsterer = (workshopId: string) =>
   useChange(workshopId, 'upholsterers', ({ id, ...input }: UpholstererInput & { id?: string }) =>

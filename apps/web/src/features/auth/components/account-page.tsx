@@ -8,6 +8,9 @@ import { Notice } from '@/components/notice.tsx';
 import { PageHeading } from '@/components/page-heading.tsx';
 import { RuleHeading } from '@/components/rule-heading.tsx';
 import { PasswordField, TextField } from '@/components/text-field.tsx';
+import { chooseTheme, useTheme } from '@/lib/theme.ts';
+import { choosePersonalUnits, UNIT_CHOICES, unitChoiceId, useUnitChoice } from '@/lib/unit-choice.ts';
+import { Select } from '@/components/select.tsx';
 import { applyProblem } from '@/lib/form-problem.ts';
 import { usePageTitle } from '@/lib/page-title.ts';
 import { sayProblem } from '@/lib/problem.ts';
@@ -131,6 +134,35 @@ function PasswordPart({ email }: { email: string }) {
   );
 }
 
+const THEMES = [
+  { value: 'system', words: 'As the system' },
+  { value: 'light', words: 'Light' },
+  { value: 'dark', words: 'Dark' },
+] as const;
+
+const UNITS = [
+  { value: 'production', words: 'As each production says' },
+  ...UNIT_CHOICES.map(({ id, words }) => ({ value: id, words })),
+];
+
+/** Kept on this device; a phone on the shop floor may differ from the desk. */
+function ShowPart() {
+  const theme = useTheme((state) => state.choice);
+  const personal = useUnitChoice((state) => state.personal);
+  return (
+    <div className="grid max-w-[26rem] gap-4">
+      <Select
+        label="Units"
+        description="How lengths are shown to you on this device, and what a bare number means."
+        options={UNITS}
+        value={unitChoiceId(personal) ?? 'production'}
+        onChange={(id) => choosePersonalUnits(UNIT_CHOICES.find((choice) => choice.id === id)?.style ?? null)}
+      />
+      <Select label="Sheet" options={THEMES} value={theme} onChange={chooseTheme} />
+    </div>
+  );
+}
+
 function SessionsPart() {
   const navigate = useNavigate();
   const [asking, setAsking] = useState(false);
@@ -193,6 +225,10 @@ export function AccountPage() {
         <section>
           <RuleHeading className="mb-4">E-mail address</RuleHeading>
           <EmailForm email={user.email} confirmed={user.emailConfirmed} />
+        </section>
+        <section>
+          <RuleHeading className="mb-4">Units and sheet</RuleHeading>
+          <ShowPart />
         </section>
         <section>
           <RuleHeading className="mb-4">Password</RuleHeading>

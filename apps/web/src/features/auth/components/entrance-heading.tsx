@@ -14,7 +14,7 @@ export function EntranceHeading({ title, tab, children }: EntranceHeadingProps) 
       <h1
         tabIndex={-1}
         data-page-heading
-        className="text-3xl leading-[3.25rem] font-light tracking-hero text-balance max-tablet:text-2xl"
+        className="text-3xl leading-[3.25rem] font-light tracking-hero text-balance max-tablet:text-2xl max-tablet:leading-10"
       >
         {title}
       </h1>

@@ -1,6 +1,9 @@
+import { lazy, Suspense } from 'react';
 import { Link, Outlet } from 'react-router-dom';
 import { Wordmark } from '@/components/brand.tsx';
-import { BayDrawing } from '../drawing/bay-drawing.tsx';
+
+/** The form comes first; the drawing may arrive after it. */
+const BayDrawing = lazy(async () => ({ default: (await import('../drawing/bay-drawing.tsx')).BayDrawing }));
 
 /** The pages before the workshop: a form on the paper, the drawing on its sheet beside it. */
 export function Entrance() {
@@ -18,16 +21,18 @@ export function Entrance() {
         </p>
       </main>
       <aside className="hidden min-h-0 flex-col border-l border-ink bg-sheet desk:sticky desk:top-0 desk:flex desk:h-dvh">
-        <div className="min-h-0 flex-1 [mask-image:linear-gradient(to_bottom,black_82%,transparent)]">
-          <BayDrawing />
+        <div className="min-h-0 flex-1 px-6 pt-4">
+          <Suspense>
+            <BayDrawing />
+          </Suspense>
         </div>
         <p className="ruled mx-10 py-5 text-xl leading-8 font-light">
-          Seat <b className="font-semibold">18″</b> off the floor with the cushion pressed: one sits, one’s
-          feet hang{' '}
+          The seat is <b className="font-semibold">18″</b> off the floor with the cushion pressed. He fits;
+          her heels hang{' '}
           <b className="font-semibold whitespace-nowrap">
             1<span className="frac">3/4</span>″
-          </b>
-          . Know it before you cut.
+          </b>{' '}
+          above it.
         </p>
       </aside>
     </div>

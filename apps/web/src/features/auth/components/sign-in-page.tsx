@@ -41,7 +41,7 @@ export function SignInPage() {
 
   return (
     <>
-      <EntranceHeading title="Benches that look right and seat everyone." tab="Sign in" />
+      <EntranceHeading title="Know who fits before the first cut." tab="Sign in" />
       <form noValidate onSubmit={(event) => void submit(event)} className="grid gap-5">
         {problem && <Notice tone="wont">{problem}</Notice>}
         <TextField

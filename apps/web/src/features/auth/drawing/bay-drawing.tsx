@@ -58,19 +58,26 @@ function Window() {
   );
 }
 
+/** Wall and floor are a wash that fades into the sheet: the room is drawn on the page and has no frame. */
 function Wall() {
   const boards = Array.from({ length: 29 }, (_, index) => 60 + index * 90);
   return (
-    <g>
-      <rect x="0" y="0" width="2620" height={FLOOR} fill="var(--color-wall)" />
+    <g mask="url(#bay-fade)">
+      <filter id="bay-soft" x="-20%" y="-20%" width="140%" height="140%">
+        <feGaussianBlur stdDeviation="90" />
+      </filter>
+      <mask id="bay-fade" maskUnits="userSpaceOnUse" x="-100" y="-200" width="2820" height="2300">
+        <rect x="210" y="60" width="2200" height="1660" fill="white" filter="url(#bay-soft)" />
+      </mask>
+      <rect x="-100" y="-200" width="2820" height={FLOOR + 200} fill="var(--color-wall)" />
       <g stroke="var(--color-rule)" strokeWidth="3">
         {boards.map((x) => (
           <path key={x} d={`M${x} 830V1530`} />
         ))}
       </g>
-      <path d={`M0 1530h2620v120H0Z`} fill="var(--color-oak-2)" opacity="0.5" />
-      <path d="M0 1530h2620" stroke="var(--color-rule-strong)" strokeWidth="3" />
-      <rect x="0" y={FLOOR} width="2620" height="250" fill="var(--color-floor)" />
+      <rect x="-100" y="1530" width="2820" height="120" fill="var(--color-oak-2)" opacity="0.5" />
+      <path d="M-100 1530h2820" stroke="var(--color-rule-strong)" strokeWidth="3" />
+      <rect x="-100" y={FLOOR} width="2820" height="400" fill="var(--color-floor)" />
     </g>
   );
 }
@@ -92,7 +99,7 @@ function Table() {
 function Lamp() {
   return (
     <g strokeLinejoin="round">
-      <path d="M1310 0V250" stroke="var(--color-pen)" strokeWidth="5" />
+      <path d="M1310 -60V250" stroke="var(--color-pen)" strokeWidth="5" />
       <path
         d="M1262 250h96l66 132h-228Z"
         fill="var(--color-sitter-5)"
@@ -121,9 +128,9 @@ function Cup({ x }: { x: number }) {
 export function BayDrawing() {
   return (
     <svg
-      viewBox="180 0 2260 1880"
-      className="h-full w-full"
-      preserveAspectRatio="xMidYMid slice"
+      viewBox="150 -60 2320 1900"
+      className="h-full w-full overflow-visible"
+      preserveAspectRatio="xMidYMid meet"
       role="img"
       aria-label="Two people on facing settles at a table under a window. Tapes give the seat height, 18 inches, and the gap under the shorter person’s heels, one and three quarter inches."
     >
@@ -138,47 +145,47 @@ export function BayDrawing() {
       <Table />
       <LayFigure
         colour={2}
-        head={[692, 392]}
-        neck={[668, 530]}
-        shoulder={[650, 652]}
-        chest={[672, 790]}
-        belly={[704, 960]}
-        hip={[706, 1086]}
-        knee={[1128, 1120]}
-        ankle={[1112, FLOOR - 72]}
-        elbow={[750, 940]}
-        wrist={[958, 876]}
+        head={[640, 394]}
+        neck={[610, 534]}
+        shoulder={[592, 652]}
+        chest={[622, 790]}
+        belly={[662, 960]}
+        hip={[670, 1086]}
+        knee={[1092, 1120]}
+        ankle={[1080, FLOOR - 72]}
+        elbow={[716, 944]}
+        wrist={[944, 876]}
       />
       <g transform={`translate(${MIDDLE * 2} 0) scale(-1 1)`}>
         <LayFigure
           colour={1}
-          head={[686, 510]}
-          neck={[664, 640]}
-          shoulder={[648, 746]}
-          chest={[668, 860]}
-          belly={[698, 1000]}
-          hip={[702, 1090]}
-          knee={[1082, 1126]}
-          ankle={[1066, FLOOR - 72 - 44]}
-          elbow={[742, 980]}
-          wrist={[930, 878]}
+          head={[646, 508]}
+          neck={[622, 640]}
+          shoulder={[602, 742]}
+          chest={[628, 860]}
+          belly={[662, 1000]}
+          hip={[670, 1090]}
+          knee={[1050, 1126]}
+          ankle={[1036, FLOOR - 72 - 44]}
+          elbow={[718, 984]}
+          wrist={[930, 876]}
         />
       </g>
       <Cup x={1130} />
       <Cup x={1480} />
-      <Tape x={360} from={FLOOR - 457} to={FLOOR} name="seat" value="18″" />
+      <Tape x={292} from={FLOOR - 457} to={FLOOR} name="seat" value="18″" />
       <g>
         <path
-          d={`M1604 ${FLOOR - 44}v44M1580 ${FLOOR - 44}h48M1580 ${FLOOR}h48`}
+          d={`M1638 ${FLOOR - 44}v44M1614 ${FLOOR - 44}h48M1614 ${FLOOR}h48`}
           stroke="var(--color-wont)"
           strokeWidth="7"
           fill="none"
         />
-        <path d={`M1604 ${FLOOR}L1660 ${FLOOR + 86}`} stroke="var(--color-wont)" strokeWidth="4" />
+        <path d={`M1638 ${FLOOR}L1680 ${FLOOR + 86}`} stroke="var(--color-wont)" strokeWidth="4" />
         <rect
           x="1560"
           y={FLOOR + 84}
-          width="326"
+          width="372"
           height="78"
           rx="5"
           fill="var(--color-sheet)"

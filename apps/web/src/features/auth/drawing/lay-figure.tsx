@@ -67,7 +67,7 @@ export function LayFigure(figure: Seated) {
           limbPath(knee, 68, ankle, 42),
         ]}
       />
-      <Silhouette fill={skin} paths={[limbPath(back(neck, 0, 24), 50, neck, 48)]} />
+      <Silhouette fill={skin} paths={[limbPath(back(neck, -4, 70), 54, back(head, -26, 40), 42)]} />
       <g transform={`rotate(8 ${head[0]} ${head[1]})`}>
         <ellipse
           cx={head[0]}

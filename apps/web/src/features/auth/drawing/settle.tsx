@@ -27,13 +27,12 @@ export function Settle({ x, floor }: { x: number; floor: number }) {
         fill="var(--color-cloth-2)"
       />
       <path
-        d={`M${x - 510} ${seat - 12}L${x - 594} ${seat - 690}Q${x - 596} ${seat - 724} ${x - 570} ${seat - 726}Q${x - 540} ${seat - 722} ${x - 532} ${seat - 680}L${x - 452} ${seat - 40}Q${x - 452} ${seat - 6} ${x - 480} ${seat - 2}Z`}
+        d={`M${x - 558} ${seat - 8}L${x - 648} ${seat - 690}Q${x - 648} ${seat - 726} ${x - 606} ${seat - 726}Q${x - 558} ${seat - 722} ${x - 546} ${seat - 670}Q${x - 476} ${seat - 330} ${x - 448} ${seat - 34}Q${x - 448} ${seat - 4} ${x - 478} ${seat}Z`}
         fill="var(--color-cloth-2)"
       />
       <path
-        d={`M${x - 492} ${seat - 60}L${x - 562} ${seat - 640}`}
+        d={`M${x - 520} ${seat - 40}Q${x - 560} ${seat - 360} ${x - 604} ${seat - 660}`}
         stroke="var(--color-cloth-3)"
-        strokeWidth="5"
         fill="none"
       />
     </g>

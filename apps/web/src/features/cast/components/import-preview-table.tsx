@@ -7,13 +7,12 @@ function Remarks({ row }: { row: ImportRow }) {
     <ul className="text-sm">
       {row.problems.map((problem) => (
         <li key={`${problem.column}${problem.read}`} className="font-medium text-wont">
-          {problem.column}: read “{problem.read}”, {problem.message}{' '}
-          <span className="font-normal">Accepted: {problem.accepted}.</span>
+          {problem.message}.
         </li>
       ))}
       {row.warnings.map((warning) => (
         <li key={`${warning.column}${warning.read}`} className="text-ink-2">
-          {warning.column}: {warning.message}
+          {warning.message}.
         </li>
       ))}
     </ul>
@@ -49,7 +48,9 @@ export function ImportPreviewTable({ rows }: { rows: readonly ImportRow[] }) {
               <th scope="row" className="py-2 pr-4 pl-1 text-left text-sm font-medium">
                 {row.line}
               </th>
-              <td className="py-2 pr-4">{row.value?.name ?? <span className="text-ink-2">left out</span>}</td>
+              <td className="py-2 pr-4 whitespace-nowrap">
+                {row.value?.name ?? <span className="text-ink-2">left out</span>}
+              </td>
               <td className="py-2 pr-4">
                 {row.value?.statureMm !== undefined && <Length mm={row.value.statureMm} feet />}
               </td>

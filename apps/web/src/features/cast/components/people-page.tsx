@@ -94,7 +94,7 @@ function RowMenu({ place, person, onEdit, onErase }: RowMenuProps) {
   return (
     <span className="flex items-center justify-end gap-4">
       <Button look="word" onClick={onEdit}>
-        Edit<span className="sr-only"> {person.name}</span>
+        Edit <span className="sr-only">{person.name}</span>
       </Button>
       <Menu
         name={`More for ${person.name}`}

@@ -54,7 +54,7 @@ export function ProductionPage({ colourOf, people, orderAction }: ProductionPage
           )
         }
       />
-      <div className="grid items-start gap-x-14 gap-y-10 desk:grid-cols-[minmax(0,1fr)_26rem]">
+      <div className="grid grid-cols-[minmax(0,1fr)] items-start gap-x-14 gap-y-10 desk:grid-cols-[minmax(0,1fr)_26rem]">
         <Sets colourOf={colourOf} onAdd={() => setAdding(true)} />
         {people}
       </div>

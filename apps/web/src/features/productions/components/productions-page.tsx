@@ -1,4 +1,4 @@
-import { useDeferredValue, useState } from 'react';
+import { lazy, Suspense, useDeferredValue, useState } from 'react';
 import { Link, useNavigate, useSearchParams } from 'react-router-dom';
 import { Button } from '@/components/button.tsx';
 import { classNames } from '@/components/class-names.ts';
@@ -12,8 +12,12 @@ import { sayProblem } from '@/lib/problem.ts';
 import { useWorkshop } from '@/lib/workshop.ts';
 import { useProductions } from '../api.ts';
 import { FirstProduction } from './first-production.tsx';
-import { ProductionDialog } from './production-dialog.tsx';
 import { ProductionRow } from './production-row.tsx';
+
+/** Its form is fetched when somebody starts a production, not with the list. */
+const ProductionDialog = lazy(async () => ({
+  default: (await import('./production-dialog.tsx')).ProductionDialog,
+}));
 
 const TABS = [
   { status: 'active', words: 'At work' },
@@ -117,12 +121,16 @@ export function ProductionsPage() {
           </Button>
         </nav>
       )}
-      <ProductionDialog
-        workshopId={workshop.id}
-        open={creating}
-        onClose={() => setCreating(false)}
-        onDone={(production) => void navigate(`/w/${workshop.id}/p/${production.id}`)}
-      />
+      {creating && (
+        <Suspense>
+          <ProductionDialog
+            open
+            workshopId={workshop.id}
+            onClose={() => setCreating(false)}
+            onDone={(production) => void navigate(`/w/${workshop.id}/p/${production.id}`)}
+          />
+        </Suspense>
+      )}
     </div>
   );
 }

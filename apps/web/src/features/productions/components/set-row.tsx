@@ -61,7 +61,7 @@ export function SetRow({ set, plan, pxPerMm }: SetRowProps) {
       <div className="flex w-66 shrink-0 items-center max-tablet:w-auto">
         <DrawingSvg drawing={plan} pxPerMm={pxPerMm} className="max-w-full" />
       </div>
-      <div className="min-w-0 flex-1 self-center">
+      <div className="min-w-0 flex-1 self-center max-tablet:self-start">
         <h3 className="text-lg font-semibold">
           <Link
             to={home}

@@ -1,4 +1,4 @@
-import { placeFramesOf, planOf } from '@settlewright/geometry';
+import { placeFramesOf, planOf, type SetDocument } from '@settlewright/geometry';
 import { useMemo, useState } from 'react';
 import { Button } from '@/components/button.tsx';
 import { commonScale } from '@/components/drawing-svg.tsx';
@@ -7,7 +7,7 @@ import { PaleBars } from '@/components/loading.tsx';
 import { Notice } from '@/components/notice.tsx';
 import { RuleHeading } from '@/components/rule-heading.tsx';
 import { ScaleBar } from '@/components/scale-bar.tsx';
-import type { SetDocument } from '@/lib/contract.ts';
+
 import { sayProblem } from '@/lib/problem.ts';
 import { useProduction } from '@/lib/production.ts';
 import { useWorkshop } from '@/lib/workshop.ts';

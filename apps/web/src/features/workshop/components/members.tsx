@@ -119,7 +119,7 @@ function OpenInvitations({ workshop }: { workshop: WorkshopAtHand }) {
               look="word"
               onClick={() => withdraw.mutate(invitation.id, { onError: (error) => toast(sayProblem(error)) })}
             >
-              Withdraw<span className="sr-only"> the invitation of {invitation.email}</span>
+              Withdraw <span className="sr-only">the invitation of {invitation.email}</span>
             </Button>
           </li>
         ))}

@@ -154,7 +154,7 @@ export function Upholsterers({ workshop }: { workshop: WorkshopAtHand }) {
             </div>
             {workshop.canEdit && (
               <Button look="word" onClick={() => show(upholsterer)}>
-                Edit<span className="sr-only"> {upholsterer.name}</span>
+                Edit <span className="sr-only">{upholsterer.name}</span>
               </Button>
             )}
           </li>

@@ -17,8 +17,8 @@ export function WorkshopPage() {
   return (
     <div className="page">
       <PageHeading above="Workshop" title={workshop.name} />
-      <div className="grid items-start gap-x-14 gap-y-10 desk:grid-cols-[1fr_26rem]">
-        <div className="grid gap-10">
+      <div className="grid grid-cols-[minmax(0,1fr)] items-start gap-x-14 gap-y-10 desk:grid-cols-[minmax(0,1fr)_26rem]">
+        <div className="grid grid-cols-[minmax(0,1fr)] gap-10">
           <Members workshop={workshop} />
           <Upholsterers workshop={workshop} />
         </div>
