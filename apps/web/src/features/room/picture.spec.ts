@@ -1,0 +1,82 @@
+import { createBodyModel, loadRuleBook, type FitCell, type MeasureKey } from '@settlewright/anthropometry';
+import { addPiece, emptySetDocument, tapeLines, type SetDocument } from '@settlewright/geometry';
+import rules from '@settlewright/seed-data/fit-rules.json';
+import summary from '@settlewright/seed-data/populations/ansur2.json';
+import { describe, expect, it } from 'vitest';
+import type { CastMember } from '@/lib/contract.ts';
+import { createPictureMaker, type ServerFitSheet } from './picture.ts';
+
+const engine = { model: createBodyModel(summary), ruleBook: loadRuleBook(rules) };
+const castId = '7f0c1a52-6a1e-4f0e-9d5d-0d6f5a0c7e11';
+const added = addPiece(emptySetDocument(), 'bench');
+const document: SetDocument = {
+  ...added.document,
+  seating: [{ pieceId: added.pieceId, place: 2, sitter: { kind: 'cast', castId } }],
+};
+const known: CastMember = {
+  id: castId,
+  name: 'Hetty Vance',
+  role: 'signal keeper',
+  colour: 3,
+  bodyData: 'women',
+  statureMm: 1511.3,
+  statureSource: 'measured',
+  weightKg: 52,
+  measured: { popliteal_height: { mm: 361.95 } },
+  shoeMm: 25,
+  clothing: 'light',
+};
+
+/** The sheet as carpenter and reviewer receive it: verdict and margin, and a body rounded to 20 mm. */
+function serverSheet(): ServerFitSheet {
+  const full = createPictureMaker(engine, [known]).check(document);
+  const open = (cell: FitCell): FitCell => {
+    if (cell.outcome.kind !== 'verdict') return cell;
+    const { kind, verdict, margin, estimated } = cell.outcome;
+    return { ...cell, outcome: { kind, verdict, margin, estimated } as FitCell['outcome'] };
+  };
+  const means = engine.model
+    .predict({ bodyData: 'women', measured: {}, shoeMm: 25, clothing: 'light' })
+    .means();
+  const rounded = Object.fromEntries(
+    Object.entries(means)
+      .filter(([key]) => key !== 'weight_kg')
+      .map(([key, mm]) => [key, Math.round(mm / 20) * 20]),
+  ) as Record<MeasureKey, number>;
+  return {
+    ...full,
+    detail: 'verdicts',
+    rows: full.rows.map((row) => ({ ...row, cells: row.cells.map(open) })),
+    bodies: [{ placeId: `${added.pieceId}:2`, means: rounded, shoeMm: 20 }],
+  };
+}
+
+describe('what follows from a document', () => {
+  it('seats whoever sits there, drawn from their own measures', () => {
+    const { bodies, sheet } = createPictureMaker(engine, [known]).picture(document);
+    expect(bodies).toMatchObject([
+      { name: 'Hetty Vance', colour: 3, placeId: `${added.pieceId}:2`, estimated: false },
+    ]);
+    expect(bodies[0]?.statureMm).toBeCloseTo(1511.3, 6);
+    expect(sheet.rows.map((row) => row.name)).toEqual(['Hetty Vance']);
+  });
+
+  it('is made once for a document, so that nothing is computed again while it is looked at', () => {
+    const maker = createPictureMaker(engine, [known]);
+    expect(maker.picture(document)).toBe(maker.picture(document));
+    const moved = { ...document, pieces: document.pieces.map((piece) => ({ ...piece, note: 'new' })) };
+    expect(maker.picture(moved).bodies[0]?.mesh).toBe(maker.picture(document).bodies[0]?.mesh);
+  });
+
+  it('shows readers without measures the server’s verdicts and body, and draws no broken tape', () => {
+    const { id, name, role, colour } = known;
+    const server = serverSheet();
+    const picture = createPictureMaker(engine, [{ id, name, role, colour }], server).picture(document);
+    expect(picture.sheet).toBe(server);
+    expect(picture.bodies).toHaveLength(1);
+    expect(picture.bodies[0]?.mesh.positions.every(Number.isFinite)).toBe(true);
+    for (const tape of tapeLines(document, picture.sheet, added.pieceId)) {
+      if (tape.kind === 'dimension') expect(Number.isFinite(tape.valueMm)).toBe(true);
+    }
+  });
+});
