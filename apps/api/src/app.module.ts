@@ -10,6 +10,7 @@ import { logParameters } from './common/request-log';
 import { settings } from './config/settings';
 import { CushionOrdersModule } from './cushion-orders/cushion-orders.module';
 import { DatabaseModule } from './database/database.module';
+import { DemoModule } from './demo/demo.module';
 import { HealthModule } from './health/health.module';
 import { InvitationsModule } from './invitations/invitations.module';
 import { MailModule } from './mail/mail.module';
@@ -43,6 +44,7 @@ import { WorkshopsModule } from './workshops/workshops.module';
     SetsModule,
     UpholsterersModule,
     CushionOrdersModule,
+    DemoModule,
     CastErasureModule,
     ProductionDuplicationModule,
   ],

@@ -25,5 +25,6 @@ async function start(): Promise<void> {
 start().catch((fault: unknown) => {
   const words = fault instanceof SettingsError ? fault.message : fault;
   console.error(words);
-  process.exitCode = 1;
+  // What was opened before the fault would keep the process alive without ever answering.
+  process.exit(1);
 });

@@ -6,6 +6,7 @@ import { CastService } from '../cast/cast.service';
 import type { CreateCastMemberDto } from '../cast/dto/save-cast-member.dto';
 import type { MemberInfo, Role } from '../common/access.decorator';
 import { InjectSettings, type Settings } from '../config/settings';
+import { withAdvisoryLock } from '../database/run-migrations';
 import { LinkService } from '../cushion-orders/link.service';
 import { OrderCorrespondence } from '../cushion-orders/order-correspondence.service';
 import { OrdersService } from '../cushion-orders/orders.service';
@@ -47,16 +48,12 @@ export class DemoLoader implements OnApplicationBootstrap {
 
   async onApplicationBootstrap(): Promise<void> {
     if (!this.settings.demo) return;
-    const runner = this.dataSource.createQueryRunner();
-    try {
-      await runner.query('SELECT pg_advisory_lock($1)', [DEMO_LOCK]);
+    await withAdvisoryLock(this.dataSource, DEMO_LOCK, async () => {
       if (await this.dataSource.manager.existsBy(Workshop, { isDemo: true })) return;
+      await this.clearUnfinished();
       await this.load();
       this.logger.log('The demonstration workshop is loaded.');
-    } finally {
-      await runner.query('SELECT pg_advisory_unlock($1)', [DEMO_LOCK]);
-      await runner.release();
-    }
+    });
   }
 
   private async load(): Promise<void> {
@@ -78,6 +75,19 @@ export class DemoLoader implements OnApplicationBootstrap {
       setIds.set(set.name, await this.designSet(member, production.id, set, castIds));
     }
     await this.orderCushions(member, production.id, setIds);
+    // Said last, so that a load that was cut short is seen and begun again.
+    await this.dataSource.manager.update(Workshop, { id: member.workshopId }, { isDemo: true });
+  }
+
+  /** What a load that was cut short left behind; orders go before the address book that they cite. */
+  private async clearUnfinished(): Promise<void> {
+    const emails = SCENARIO.people.map(({ email }) => email);
+    const workshops = `SELECT workshop_id FROM memberships JOIN users ON users.id = user_id WHERE email = ANY($1)`;
+    await this.dataSource.transaction(async (manager) => {
+      await manager.query(`DELETE FROM productions WHERE workshop_id IN (${workshops})`, [emails]);
+      await manager.query(`DELETE FROM workshops WHERE id IN (${workshops})`, [emails]);
+      await manager.query('DELETE FROM users WHERE email = ANY($1)', [emails]);
+    });
   }
 
   private async openWorkshop(): Promise<MemberInfo> {
@@ -88,7 +98,7 @@ export class DemoLoader implements OnApplicationBootstrap {
         const user = await this.users.create(manager, { name, email, passwordHash, emailConfirmed: true });
         if (owner === undefined) {
           const { name: workshopName, telephone, timeZone } = SCENARIO.workshop;
-          const details = { name: workshopName, telephone, timeZone, paper: 'letter' as const, isDemo: true };
+          const details = { name: workshopName, telephone, timeZone, paper: 'letter' as const };
           const { id } = await this.workshops.create(manager, user.id, details);
           owner = { workshopId: id, userId: user.id, role: 'owner' };
         } else {
@@ -120,7 +130,10 @@ export class DemoLoader implements OnApplicationBootstrap {
       });
       number = draft.number;
       if (step.issue !== undefined) {
-        await this.revisions.issue(member, productionId, created.id, { baseNumber: number, note: step.issue });
+        await this.revisions.issue(member, productionId, created.id, {
+          baseNumber: number,
+          note: step.issue,
+        });
       }
     }
     return created.id;

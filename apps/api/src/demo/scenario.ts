@@ -2,7 +2,13 @@ import corridor from '@settlewright/seed-data/demo/corridor.json';
 import diningCar from '@settlewright/seed-data/demo/dining-car.json';
 import scenario from '@settlewright/seed-data/demo/scenario.json';
 import waitingRoom from '@settlewright/seed-data/demo/waiting-room.json';
-import { type Piece, readSetDocument, type SetDocument, setParameter, type SitterRef } from '@settlewright/geometry';
+import {
+  type Piece,
+  readSetDocument,
+  type SetDocument,
+  setParameter,
+  type SitterRef,
+} from '@settlewright/geometry';
 
 const DOCUMENTS: Record<string, unknown> = {
   'dining-car': diningCar,
