@@ -47,7 +47,11 @@ function back(list: PartList, bench: PieceOf<'bench'>, layout: BenchLayout): voi
   const rearTopZ = faceTopZ - backBoardMm * cos;
   // Below the seat a leaning back comes forward: boards and posts stop short of the seat cushion.
   const cushionRearZ =
-    layout.faceZMm - bench.seatCushion.thicknessMm * Math.max(0, -Math.sin(layout.tiltRad));
+    layout.faceZMm -
+    Math.min(
+      bench.seatCushion.thicknessMm * Math.max(0, -Math.sin(layout.tiltRad)),
+      bench.backCushion.thicknessMm / cos,
+    );
   const downToCushion = sin > 1e-9 ? (cushionRearZ - faceTopZ) / sin : Infinity;
   const boardLength = Math.min(
     downToDeck(backTopMm, faceTopZ),
@@ -94,8 +98,8 @@ function cushions(list: PartList, bench: PieceOf<'bench'>, layout: BenchLayout):
   const seat = bench.seatCushion.thicknessMm;
   const pad = bench.backCushion.thicknessMm;
   const [sinLean, cosLean] = [Math.sin(leanRad), Math.cos(leanRad)];
-  // Tilted forward, the lower rear edge of a seat cushion leans back; without a pad it is cut short of the boards.
-  const cutMm = Math.max(0, -seat * Math.sin(tiltRad) - pad / cosLean);
+  // Tilted forward, the lower rear edge of a seat cushion leans back; without a pad it is cut short there.
+  const cutMm = Math.max(0, -seat * Math.sin(tiltRad) - (layout.hasBack ? pad / cosLean : 0));
   const slope = (bench.seatDepthMm - cutMm) / Math.cos(tiltRad);
   // On a thin seat the lower rear edge of the pad would dip into the deck: it starts higher up the lean.
   const padRearMm = layout.seatTopRearMm - pad * sinLean - layout.deckTopAt(faceZMm - pad * cosLean);

@@ -54,10 +54,7 @@ export interface Envelope {
 }
 
 /** What a piece starts from. */
-type CommonFields = Pick<
-  PieceOf<'bench'>,
-  'id' | 'mark' | 'name' | 'at' | 'accessible' | 'locked' | 'note'
->;
+type CommonFields = Pick<PieceOf<'bench'>, 'id' | 'mark' | 'name' | 'at' | 'accessible' | 'locked' | 'note'>;
 
 /** Everything the library knows about one kind of piece. */
 export interface PieceDefinition<K extends PieceKind> {
