@@ -5,6 +5,7 @@ import { useChangeNumber } from '../hooks/use-change-number.ts';
 import { useNumberEdit } from '../hooks/use-number-edit.ts';
 import { sayNumber, showNumber, type NumberParameter, type Reading } from '../numbers.ts';
 import { useSurroundings } from '../room-context.tsx';
+import { focusWayOut } from './focus-way-out.ts';
 
 /** The number that has the hand just now; its slip stands beside the sentence. */
 export interface NumberAtHand {
@@ -44,7 +45,8 @@ export function NumberFlag({ pieceId, parameter, look, slipId, onHand, onNext }:
   const selectAll = useRef(true);
   const edit = useNumberEdit(parameter, style, change, {
     left: () => {
-      backToButton.current = document.activeElement === field.current;
+      const active = document.activeElement;
+      backToButton.current = active === field.current || active?.closest(`#${CSS.escape(slipId)}`) != null;
     },
   });
   const { editing, reading } = edit;
@@ -91,7 +93,10 @@ export function NumberFlag({ pieceId, parameter, look, slipId, onHand, onNext }:
   function fieldKeys(event: KeyboardEvent<HTMLInputElement>) {
     edit.keys(event);
     if (event.key !== 'Tab') return;
-    if (!edit.finish() || onNext(event.shiftKey)) event.preventDefault();
+    if (reading.kind !== 'value') {
+      event.preventDefault();
+      focusWayOut(slipId);
+    } else if (!edit.finish() || onNext(event.shiftKey)) event.preventDefault();
   }
 
   if (!canEdit) {

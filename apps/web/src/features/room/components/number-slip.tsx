@@ -47,7 +47,13 @@ export function NumberSlip({ id, pieceId, parameter, reading, editing, onTake }:
   }
 
   return (
-    <div id={id} role={editing ? 'alert' : undefined} className="border-l-[3px] border-wont pl-4">
+    <div
+      id={id}
+      role={editing ? 'alert' : undefined}
+      // A press on a button here must not end the edit it is about.
+      onMouseDown={(event) => event.preventDefault()}
+      className="border-l-[3px] border-wont pl-4"
+    >
       {reading.kind === 'outside' ? (
         <>
           <strong className="block font-medium text-wont">

@@ -135,6 +135,18 @@ describe('a number of the spec sentence', () => {
     expect(valueOf('pressedSeatHeight')).toBeCloseTo(457.2, 6);
   });
 
+  it('leads with Tab from what could not be read to the ways out, and back to the number', async () => {
+    const user = open();
+    await user.click(seat());
+    await user.clear(field());
+    await user.type(field(), '1/5');
+    await user.tab();
+    expect(screen.getAllByRole('button', { name: /mm$/ })[0]).toHaveFocus();
+    await user.keyboard('{Enter}');
+    expect(valueOf('pressedSeatHeight')).toBeCloseTo(17 * 25.4, 6);
+    expect(seat()).toHaveFocus();
+  });
+
   it('names the limit of what is impossible and offers it', async () => {
     const user = open();
     const limit = parametersOf(document.pieces[0]!).find(({ key }) => key === 'seatDepthMm')!.max;

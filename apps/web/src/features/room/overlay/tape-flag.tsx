@@ -2,6 +2,7 @@ import type { LengthStyle, TapeLine } from '@settlewright/geometry';
 import { useId, useLayoutEffect, useRef, useState } from 'react';
 import { classNames } from '@/components/class-names.ts';
 import { Measure } from '@/components/measure.tsx';
+import { focusWayOut } from '../components/focus-way-out.ts';
 import { NumberSlip } from '../components/number-slip.tsx';
 import { numbersOf } from '../components/piece-numbers.ts';
 import { useChangeNumber } from '../hooks/use-change-number.ts';
@@ -156,7 +157,10 @@ function EditableFlag({
         onKeyDown={(event) => {
           event.stopPropagation();
           edit.keys(event);
-          if (event.key === 'Tab' && !edit.finish()) event.preventDefault();
+          if (event.key === 'Tab' && !edit.finish()) {
+            event.preventDefault();
+            focusWayOut(slipId);
+          }
         }}
         onBlur={(event) => {
           if (event.relatedTarget?.closest(`#${CSS.escape(slipId)}`)) return;
