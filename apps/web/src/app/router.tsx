@@ -54,6 +54,7 @@ export const router = createBrowserRouter([
                           { path: 'people', lazy: () => import('@/routes/people.tsx') },
                           { path: 'sets/:setId', lazy: () => import('@/routes/room.tsx') },
                           { path: 'orders/:orderId', lazy: () => import('@/routes/order.tsx') },
+                          { path: 'sets/:setId/fit', lazy: () => import('@/routes/fit.tsx') },
                           { path: 'sets/:setId/revisions', lazy: () => import('@/routes/revisions.tsx') },
                         ],
                       },

@@ -1,12 +1,9 @@
 import { Toaster } from 'sonner';
-import { useTheme } from '@/lib/theme.ts';
 
-/** Short words about what was done, at the foot of the page. */
+/** Short words about what was done, at the foot of the page; in the page's own colours, light or dark. */
 export function Toasts() {
-  const theme = useTheme((state) => state.choice);
   return (
     <Toaster
-      theme={theme}
       position="bottom-center"
       toastOptions={{
         unstyled: true,

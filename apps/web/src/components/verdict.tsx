@@ -97,7 +97,7 @@ export function VerdictCell({ verdict, estimated = false, margin, className }: V
   return (
     <span className={classNames('inline-flex items-center gap-2', TONES[verdict], className)}>
       <GapMark verdict={verdict} estimated={estimated} />
-      <span className="grid text-left leading-[1.125rem]">
+      <span className="grid text-left leading-[1.125rem] whitespace-nowrap">
         <span className={estimated ? undefined : 'font-semibold'}>{margin}</span>
         <span className="text-xs leading-[0.875rem]">
           {WORDS[verdict]}
@@ -119,7 +119,7 @@ interface VerdictCountsProps {
 export function VerdictCounts({ counts, className }: VerdictCountsProps) {
   const present = VERDICT_ORDER.filter((verdict) => counts[verdict] > 0);
   return (
-    <ul className={classNames('flex flex-wrap gap-x-5 gap-y-1.5', className)}>
+    <ul className={classNames('flex flex-wrap gap-x-4 gap-y-1.5', className)}>
       {present.map((verdict) => (
         <li
           key={verdict}

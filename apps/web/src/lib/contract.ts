@@ -47,29 +47,5 @@ export type ImportResult = Schema['CastImportDto'];
 export type SetSummary = Omit<Schema['SetDto'], 'document'> & { document: SetDocument };
 export type Draft = Omit<Schema['DraftDto'], 'document'> & { document: SetDocument };
 
-export type OrderState =
-  | 'draft'
-  | 'sent'
-  | 'quoted'
-  | 'agreed'
-  | 'first-article'
-  | 'in-work'
-  | 'shipped'
-  | 'received'
-  | 'closed'
-  | 'cancelled';
-
-export interface OrderSummary {
-  id: string;
-  number: number;
-  title: string;
-  state: OrderState;
-  setId: string;
-  setName: string;
-  revisionLetter: string;
-  neededBy: string | null;
-  cushionCount: number;
-  upholsterer: { id: string; name: string; contactName: string } | null;
-  openQuestions: number;
-  updatedAt: string;
-}
+export type OrderState = Schema['OrderState'];
+export type OrderSummary = Schema['OrderSummaryDto'];

@@ -1,6 +1,6 @@
 import { useMutation, useQuery } from '@tanstack/react-query';
 import { api } from '@/lib/api-client.ts';
-import type { InvitationOffer, Session, SessionUser } from '@/lib/contract.ts';
+import type { InvitationOffer, Session, SessionUser, Workshop } from '@/lib/contract.ts';
 import { takeSession, useSession } from '@/lib/session.ts';
 
 const public_ = { anonymous: true } as const;
@@ -77,5 +77,13 @@ export function useAcceptInvitation(token: string) {
     mutationFn: (input: { name?: string; password?: string }) =>
       api.post<Session>(`/invitations/${token}/accept`, input, { anonymous: input.password !== undefined }),
     onSuccess: takeSession,
+  });
+}
+
+export function useStartWorkshop() {
+  return useMutation({
+    mutationFn: (input: { name: string }) => api.post<Workshop>('/workshops', input),
+    onSuccess: ({ id, name, role, isDemo }) =>
+      useSession.setState(({ workshops }) => ({ workshops: [...workshops, { id, name, role, isDemo }] })),
   });
 }

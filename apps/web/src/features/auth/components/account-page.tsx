@@ -19,6 +19,7 @@ import { signOut } from '@/lib/sign-out.ts';
 import { type TitleCell, useTitleCells } from '@/lib/title-cells.ts';
 import { useAskForReset, useChangeEmail, useRename, useResendConfirmation } from '../api.ts';
 import { EMAIL_RULES } from '../rules.ts';
+import { WorkshopsPart } from './workshops-part.tsx';
 
 function NameForm({ name }: { name: string }) {
   const rename = useRename();
@@ -225,6 +226,10 @@ export function AccountPage() {
         <section>
           <RuleHeading className="mb-4">E-mail address</RuleHeading>
           <EmailForm email={user.email} confirmed={user.emailConfirmed} />
+        </section>
+        <section>
+          <RuleHeading className="mb-4">Workshops</RuleHeading>
+          <WorkshopsPart />
         </section>
         <section>
           <RuleHeading className="mb-4">Units and sheet</RuleHeading>

@@ -32,7 +32,7 @@ export function Entrance() {
           <b className="font-semibold whitespace-nowrap">
             1<span className="frac">3/4</span>″
           </b>{' '}
-          above it.
+          clear of it.
         </p>
       </aside>
     </div>

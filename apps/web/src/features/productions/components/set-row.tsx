@@ -24,9 +24,10 @@ function issuedWords({ lastRevision }: SetSummary): string {
 }
 
 function SetCounts({ set }: { set: SetSummary }) {
-  if (set.seatedCount === 0) return <Verdict verdict="notKnown" more=", nobody seated yet" />;
+  if (set.seatedCount === 0)
+    return <Verdict verdict="notKnown" more=", nobody seated yet" className="text-sm" />;
   if (set.counts === undefined) return <p className="text-sm text-ink-2">The fit sheet could not be made.</p>;
-  return <VerdictCounts counts={set.counts} />;
+  return <VerdictCounts counts={set.counts} className="text-sm" />;
 }
 
 interface SetRowProps {
