@@ -42,9 +42,10 @@ export function marginText(
   const half = (marginRange.high - marginRange.low) / 2;
   const rounded = half >= WIDE_RANGE_MM ? coarse(margin, style) : margin;
   const roundedHalf = half >= WIDE_RANGE_MM ? coarse(half, style) : half;
+  const halfText = formatLength(roundedHalf, style).replace(/[\s\u202f]*(mm|″)$/, '');
   return {
     margin: signed(formatLength(rounded, style), rounded),
-    range: `± ${formatLength(roundedHalf, style).replace(/[″\s ]*(mm|″)?$/, '')}`,
+    range: halfText === '0' ? undefined : `± ${halfText}`,
   };
 }
 

@@ -81,7 +81,7 @@ function Group({ group, words }: { group: CushionGroup; words: OrderSpec }) {
   const { spec, marks, mirroredMarks } = group;
   const drawing = useMemo(() => cushionDrawing(spec), [spec]);
   return (
-    <section className="ruled grid gap-x-10 gap-y-4 pt-3 pb-10 lg:grid-cols-[17.5rem_1fr]">
+    <section className="ruled grid gap-x-10 gap-y-4 pt-3 pb-10 desk:grid-cols-[17.5rem_1fr]">
       <div>
         <h3 className="flex flex-wrap items-center gap-2 font-semibold">
           {marks.map((mark) => (
@@ -119,7 +119,7 @@ function Group({ group, words }: { group: CushionGroup; words: OrderSpec }) {
             />
           </div>
         </div>
-        <div className="grid gap-6 sm:grid-cols-2">
+        <div className="grid gap-6 phone:grid-cols-2">
           <div>
             <p className="text-sm text-ink-2">From the front</p>
             <CushionDrawing drawing={drawing.front} label={`${marks[0] ?? ''}, front edge`} widthPx={300} />

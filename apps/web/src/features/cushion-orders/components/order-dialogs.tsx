@@ -71,7 +71,7 @@ export function ChangeOrderDialog({ path, order, open, onClose }: DialogOfOrder)
       problem={problem}
       onSubmit={(event) => void submit(event)}
     >
-      <div className="grid gap-4 sm:grid-cols-2">
+      <div className="grid gap-4 phone:grid-cols-2">
         <TextField label="Title" error={errors.title?.message} {...form.register('title')} />
         <TextField
           label="Needed by"
@@ -94,7 +94,7 @@ export function ChangeOrderDialog({ path, order, open, onClose }: DialogOfOrder)
           const lines = key === 'notes' || key === 'flammability';
           const words = { label: SPEC_WORDS[key], error: errors[key]?.message };
           return lines ? (
-            <TextArea key={key} {...words} className="sm:col-span-2" {...form.register(key)} />
+            <TextArea key={key} {...words} className="phone:col-span-2" {...form.register(key)} />
           ) : (
             <TextField key={key} {...words} {...form.register(key)} />
           );

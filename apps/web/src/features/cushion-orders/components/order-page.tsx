@@ -184,7 +184,7 @@ function Opened({ path, order }: { path: OrderPath; order: Order }) {
           </button>
         )}
       </div>
-      <div className="grid gap-10 xl:grid-cols-[1fr_20rem]">
+      <div className="grid gap-10 desk:grid-cols-[1fr_20rem]">
         <div className="min-w-0">
           <CushionGroups cushions={order.cushions} words={order.spec} />
           {order.spec.notes !== '' && (

@@ -80,7 +80,7 @@ function Opened({ token, order }: { token: string; order: PublicOrder }) {
   }, [order.units, order.roundTo]);
   const marks = order.cushions.map(({ mark }) => mark);
   return (
-    <div className="mx-auto grid max-w-[72rem] gap-x-16 gap-y-8 px-8 py-6 max-tablet:px-4 lg:grid-cols-[1fr_21rem]">
+    <div className="mx-auto grid max-w-[72rem] gap-x-16 gap-y-8 px-8 py-6 max-tablet:px-4 desk:grid-cols-[1fr_21rem]">
       <div className="min-w-0">
         <h1 tabIndex={-1} data-page-heading className="text-2xl font-light tracking-hero">
           {order.title}

@@ -89,7 +89,7 @@ export function CellSlip({ cell, sitterName }: { cell: FitCell; sitterName: stri
   const rule = ruleBook.rule(cell.ruleId);
   const full = detail === 'full';
   return (
-    <div className="grid gap-6 bg-sheet px-5 py-4 shadow-slip lg:grid-cols-[minmax(18rem,1.1fr)_1fr_1.2fr]">
+    <div className="grid gap-6 bg-sheet px-5 py-4 shadow-slip desk:grid-cols-[minmax(18rem,1.1fr)_1fr_1.2fr]">
       {outcome.kind === 'verdict' && full && <Sums outcome={outcome} ruleId={cell.ruleId} />}
       {outcome.kind === 'verdict' && !full && (
         <p className="flex items-baseline gap-3">

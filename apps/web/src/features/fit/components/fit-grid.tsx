@@ -92,7 +92,7 @@ export function FitGrid({ order = 'place', showPlace = false, showPublic = false
 
   const span = columns.length + 1 + (showPlace ? 1 : 0);
   return (
-    <table ref={table} className="w-full min-w-[52rem] border-collapse" onKeyDown={onKeyDown}>
+    <table ref={table} className="w-full min-w-max border-collapse" onKeyDown={onKeyDown}>
       <caption className="sr-only">Fit sheet: sitters against checks</caption>
       <thead className="sticky top-0 z-10 bg-[inherit]">
         <tr className="border-b border-ink text-left text-sm text-ink-2">

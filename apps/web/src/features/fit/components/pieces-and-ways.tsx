@@ -82,7 +82,7 @@ export function PiecesAndWays() {
       {asked.length === 0 ? (
         <p className="text-ink-2">Nothing to say yet: no bench, table or way is asked about.</p>
       ) : (
-        <ul className="grid gap-x-8 sm:grid-cols-2 xl:grid-cols-4">
+        <ul className="grid gap-x-8 phone:grid-cols-2 desk:grid-cols-4">
           {asked.map((cell) => (
             <Line key={cell.id} cell={cell} />
           ))}
