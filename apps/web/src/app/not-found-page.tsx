@@ -14,7 +14,12 @@ export function NotFoundPage() {
         aria-hidden="true"
         className="tape mb-6 text-rule-strong"
       >
-        <path d="M40 8v60h44V44h60M144 44v24" stroke="currentColor" strokeWidth="1.5" strokeDasharray="5 4" />
+        <path
+          d="M64 6 78 44h62v-8H74M82 44v24M132 44v24"
+          stroke="currentColor"
+          strokeWidth="1.5"
+          strokeDasharray="5 4"
+        />
         <path d="M4 68.5h232" stroke="var(--color-ink)" strokeWidth="1.5" />
       </svg>
       <h1 tabIndex={-1} data-page-heading className="text-3xl font-light tracking-hero">

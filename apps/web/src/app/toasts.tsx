@@ -8,7 +8,8 @@ export function Toasts() {
       toastOptions={{
         unstyled: true,
         classNames: {
-          toast: 'flex w-full items-start gap-3 rounded-md bg-ink px-4 py-3 text-sm text-paper shadow-slip',
+          toast:
+            'font-sans flex w-full items-start gap-3 rounded-md bg-ink px-4 py-3 text-sm text-paper shadow-slip',
           actionButton: 'ml-auto shrink-0 font-semibold underline underline-offset-4',
         },
       }}

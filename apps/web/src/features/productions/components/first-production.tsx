@@ -34,7 +34,7 @@ export function FirstProduction({ canEdit, onStart }: { canEdit: boolean; onStar
         <ol>
           {STEPS.map(([lead, rest], index) => (
             <li key={lead} className="flex gap-4 border-t border-rule py-2.5">
-              <span aria-hidden="true" className="w-3 font-semibold">
+              <span aria-hidden="true" className="w-3 shrink-0 font-semibold">
                 {index + 1}
               </span>
               <span>

@@ -14,8 +14,8 @@ const UNITS = [
 ] as const;
 
 const ROUNDING = [
-  { value: 8, words: 'to an eighth of an inch' },
-  { value: 16, words: 'to a sixteenth of an inch' },
+  { value: 8, words: 'to 1/8 inch' },
+  { value: 16, words: 'to 1/16 inch' },
 ] as const;
 
 const BLANK: ProductionInput = { name: '', summary: '', units: 'feet-inches', roundTo: 8 };

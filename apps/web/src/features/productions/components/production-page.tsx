@@ -35,7 +35,7 @@ export function ProductionPage({ colourOf, people, orderAction }: ProductionPage
             {workshop.canEdit && (
               <>
                 {production.summary && ' '}
-                <Button look="word" className="ml-1" onClick={() => setChanging(true)}>
+                <Button look="word" onClick={() => setChanging(true)}>
                   Change
                 </Button>
               </>
