@@ -44,7 +44,7 @@ module.exports = {
     doNotFollow: { path: 'node_modules' },
     exclude: { path: '(^|/)dist/' },
     tsPreCompilationDeps: 'specify',
-    tsConfig: { fileName: 'apps/web/tsconfig.json' },
+    tsConfig: { fileName: 'tsconfig.depend.json' },
     enhancedResolveOptions: { conditionNames: ['source', 'import', 'require', 'node', 'default'] },
   },
 };

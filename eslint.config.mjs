@@ -38,5 +38,9 @@ export default tseslint.config(
     files: ['**/*.{js,mjs,cjs}'],
     languageOptions: { globals: globals.node },
   },
+  {
+    files: ['apps/web/public/**/*.js'],
+    languageOptions: { globals: globals.browser },
+  },
   prettier,
 );

@@ -51,12 +51,6 @@ export const SearchIcon = () => (
   </Icon>
 );
 
-export const SheetIcon = () => (
-  <Icon>
-    <path d="M4.5 3h8l3 3v11h-11zM12.5 3v3h3M7 9.5h6M7 12.5h6" />
-  </Icon>
-);
-
 export const MoreIcon = () => (
   <Icon>
     <path d="M4 10h.01M10 10h.01M16 10h.01" strokeWidth="2.5" />

@@ -1,4 +1,3 @@
-import type { FitSheet } from '@settlewright/anthropometry';
 import type { LengthStyle, Piece } from '@settlewright/geometry';
 import { createContext, useContext } from 'react';
 import type { CastMember } from '@/lib/contract.ts';
@@ -42,10 +41,6 @@ export function useAutosave(): Autosave {
 export function usePicture(): RoomPicture {
   const { maker } = useSurroundings();
   return maker.picture(useRoom(shownDocument));
-}
-
-export function useSheet(): FitSheet {
-  return usePicture().sheet;
 }
 
 export function usePiece(pieceId: string | undefined): Piece | undefined {
