@@ -52,3 +52,4 @@ export { deriveCushions } from './cushions/derive-cushions.ts';
 export { groupCushions } from './cushions/group-cushions.ts';
 export type { TapeLine } from './tapes/tape-line.ts';
 export { tapeLines, type TapeBody } from './tapes/tape-lines.ts';
+export * from './situation/seat-height-bands.ts';

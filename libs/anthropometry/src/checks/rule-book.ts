@@ -47,6 +47,17 @@ export interface Rule {
   };
 }
 
+/** A range that the trade builds to, shown beside what the sitters need; it decides no verdict. */
+export interface Practice {
+  id: string;
+  words: string;
+  lowerIn: number;
+  usualIn: number;
+  upperIn: number;
+  sourceWord: Rule['sourceWord'];
+  source: string;
+}
+
 /** All rules of one version, in the order of the sheet. */
 export interface RuleBook {
   version: string;
@@ -54,6 +65,7 @@ export interface RuleBook {
   confidence: number;
   /** How far past a line still counts as on it. */
   boundaryTolerance: Record<RuleUnit, number>;
+  practices: Practice[];
   rules: Rule[];
   /** @throws RangeError when the book has no such rule */
   rule(id: string): Rule;
@@ -104,6 +116,17 @@ const bookSchema = z.object({
     deg: z.number().nonnegative(),
     count: z.number().nonnegative(),
   }),
+  practices: z.array(
+    z.object({
+      id: z.string().min(1),
+      words: z.string().min(1),
+      lowerIn: z.number(),
+      usualIn: z.number(),
+      upperIn: z.number(),
+      sourceWord: z.enum(['published source', 'common practice', 'shop rule', 'from memory']),
+      source: z.string().min(1),
+    }),
+  ),
   rules: z.array(ruleSchema).min(1),
 });
 
@@ -120,7 +143,7 @@ export function loadRuleBook(json: unknown): RuleBook {
     const [issue] = parsed.error.issues;
     throw new Error(`Fit rules: ${issue?.path.join('.') ?? ''}: ${issue?.message ?? 'not readable'}`);
   }
-  const { version, confidence, boundaryTolerance, rules } = parsed.data;
+  const { version, confidence, boundaryTolerance, practices, rules } = parsed.data;
   const byId = new Map(rules.map((rule) => [rule.id, rule]));
   if (byId.size !== rules.length)
     throw new Error('Fit rules: two rules carry the same id; accepted: one each');
@@ -128,6 +151,7 @@ export function loadRuleBook(json: unknown): RuleBook {
     version,
     confidence,
     boundaryTolerance,
+    practices,
     rules,
     rule(id) {
       const rule = byId.get(id);

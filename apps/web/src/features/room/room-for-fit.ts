@@ -1,5 +1,11 @@
 import type { FitCell, FitSheet, RuleBook } from '@settlewright/anthropometry';
-import { suggestFixes, formatLength, type Fix, type LengthStyle } from '@settlewright/geometry';
+import {
+  suggestFixes,
+  formatLength,
+  type Fix,
+  type LengthStyle,
+  type SetDocument,
+} from '@settlewright/geometry';
 import { useMemo } from 'react';
 import { useRoomAddress } from './hooks/use-address.ts';
 import { usePieceActions } from './hooks/use-piece-actions.ts';
@@ -9,6 +15,7 @@ import { useRoom, useRoomStore } from './store.ts';
 
 /** What the fit sheet needs of the room; the route hands it on, as features do not know each other. */
 export interface RoomForFit {
+  document: SetDocument;
   sheet: FitSheet;
   ruleBook: RuleBook;
   style: LengthStyle;
@@ -43,6 +50,7 @@ export function useRoomForFit(): RoomForFit {
     );
     const bodyOf = new Map(picture.bodies.map((body) => [body.placeId, body]));
     return {
+      document: picture.document,
       sheet: picture.sheet,
       ruleBook: engine.ruleBook,
       style,
