@@ -1,76 +1,19 @@
-import { SOURCE_MARK_WORDS, whyFor, type FitCell, type VerdictOutcome } from '@settlewright/anthropometry';
-import { Measure } from '@/components/measure.tsx';
+import { SOURCE_MARK_WORDS, whyFor, type FitCell } from '@settlewright/anthropometry';
+import type { CSSProperties } from 'react';
+import { classNames } from '@/components/class-names.ts';
 import { Verdict } from '@/components/verdict.tsx';
-import { amountText, measureWords } from '../amounts.ts';
 import { useFitView } from '../fit-view.ts';
+import { Doubt, Sums } from './cell-sums.tsx';
 import { Margin } from './fit-cell.tsx';
 import { FixList } from './fix-list.tsx';
-import { Ledger } from './ledger.tsx';
-
-/** Lines of a rule in words: "pass up to 16⅜″, fail beyond 17⅜″". */
-function LimitWords({ outcome, ruleId }: { outcome: VerdictOutcome; ruleId: string }) {
-  const { ruleBook, style } = useFitView();
-  const { unit } = ruleBook.rule(ruleId);
-  const words = (name: string, { lower, upper }: VerdictOutcome['pass']) => {
-    const from = lower === undefined ? undefined : amountText(lower, unit, style);
-    const to = upper === undefined ? undefined : amountText(upper, unit, style);
-    if (from !== undefined && to !== undefined) return `${name} ${from} to ${to}`;
-    return from === undefined ? `${name} up to ${to ?? ''}` : `${name} from ${from}`;
-  };
-  return (
-    <p className="text-sm text-ink-2">
-      <Measure text={words('Fits', outcome.pass)} />; <Measure text={words('tight', outcome.fail)} />.
-    </p>
-  );
-}
-
-function Sums({ outcome, ruleId }: { outcome: VerdictOutcome; ruleId: string }) {
-  const { ruleBook, style } = useFitView();
-  const { unit } = ruleBook.rule(ruleId);
-  return (
-    <div className="grid content-start gap-3">
-      <div className="grid grid-cols-2 gap-6 max-tablet:grid-cols-1">
-        <Ledger caption="The body" lines={outcome.bodyLedger} unit={unit} />
-        <Ledger caption="The set" lines={outcome.setLedger} unit={unit} />
-      </div>
-      <div className="flex flex-wrap items-baseline justify-between gap-x-4 border-t border-ink pt-2">
-        <Verdict verdict={outcome.verdict} estimated={outcome.estimated} />
-        <p className="text-sm text-ink-2">
-          measured <Measure text={amountText(outcome.value, unit, style)} />, margin{' '}
-          <span className="text-xl font-light text-ink">
-            <Margin outcome={outcome} ruleId={ruleId} />
-          </span>
-        </p>
-      </div>
-      <LimitWords outcome={outcome} ruleId={ruleId} />
-    </div>
-  );
-}
-
-function Doubt({ outcome }: { outcome: VerdictOutcome }) {
-  if (!outcome.estimated) return null;
-  const inHundred = (probability: number) => Math.round(probability * 100);
-  return (
-    <p className="mt-2 text-sm text-ink-2">
-      Predicted, not measured: {inHundred(outcome.probability.pass)} in 100 such people fit,{' '}
-      {inHundred(outcome.probability.insideFail)} in 100 are at least tight.
-      {outcome.settleWith.length > 0 && (
-        <strong className="font-semibold text-ink">
-          {' '}
-          To settle it, measure {measureWords(outcome.settleWith.slice(0, 2))}.
-        </strong>
-      )}
-    </p>
-  );
-}
 
 /** Where a limit comes from, in the same words on screen and paper. */
-export function SourceLine({ ruleId }: { ruleId: string }) {
+function SourceLine({ ruleId }: { ruleId: string }) {
   const { ruleBook } = useFitView();
   const rule = ruleBook.rule(ruleId);
   return (
-    <p className="mt-2 text-sm text-ink-2">
-      Rule {rule.id}, {rule.sourceWord}. {rule.thresholdBasis}.{' '}
+    <p className="mt-2 text-sm break-words text-ink-2">
+      Rule {rule.id}, {rule.sourceWord}. {rule.thresholdBasis.replace(/\.$/, '')}.{' '}
       {rule.sources.map(({ cite, mark }, index) => (
         <span key={cite}>
           {index > 0 && '; '}
@@ -84,28 +27,48 @@ export function SourceLine({ ruleId }: { ruleId: string }) {
 
 /** Everything behind one cell: the sum, why, the source, and what would change it. */
 export function CellSlip({ cell, sitterName }: { cell: FitCell; sitterName: string }) {
-  const { ruleBook, detail } = useFitView();
+  const { ruleBook, detail, fixesFor } = useFitView();
   const { outcome } = cell;
-  const rule = ruleBook.rule(cell.ruleId);
-  const full = detail === 'full';
+  const verdict = outcome.kind === 'verdict' ? outcome : undefined;
+  const sums = verdict !== undefined && detail === 'full';
+  // The public sits nowhere in particular, so there is no one number to change for it.
+  const ofThePublic = cell.scope === 'person' && cell.sitterId === undefined;
+  const fixable =
+    fixesFor !== undefined &&
+    !ofThePublic &&
+    ((verdict !== undefined && verdict.verdict !== 'fits') || (outcome.kind === 'clause' && !outcome.inside));
+  const columns = [sums && 'minmax(20rem,1.1fr)', 'minmax(14rem,0.9fr)', fixable && 'minmax(18rem,1.1fr)'];
   return (
-    <div className="grid gap-6 bg-sheet px-5 py-4 shadow-slip desk:grid-cols-[minmax(18rem,1.1fr)_1fr_1.2fr]">
-      {outcome.kind === 'verdict' && full && <Sums outcome={outcome} ruleId={cell.ruleId} />}
-      {outcome.kind === 'verdict' && !full && (
-        <p className="flex items-baseline gap-3">
-          <Verdict verdict={outcome.verdict} estimated={outcome.estimated} />
-          <Margin outcome={outcome} ruleId={cell.ruleId} />
-        </p>
-      )}
-      <div>
-        <p>
-          <strong className="font-semibold">Why.</strong> {whyFor(rule, sitterName)}
-        </p>
-        {outcome.kind === 'verdict' && full && <Doubt outcome={outcome} />}
-        {cell.side !== undefined && <p className="mt-2 text-sm text-ink-2">At the sitter’s {cell.side}.</p>}
-        <SourceLine ruleId={cell.ruleId} />
+    <div className="@container bg-(--slip,var(--color-sheet)) shadow-slip">
+      <div
+        className={classNames(
+          'grid gap-x-10 gap-y-5 px-5 py-4 max-tablet:px-4',
+          '@min-[60rem]:[grid-template-columns:var(--columns)]',
+          sums && fixable && '@min-[42rem]:@max-[60rem]:grid-cols-2',
+        )}
+        style={{ '--columns': columns.filter(Boolean).join(' ') } as CSSProperties}
+      >
+        {verdict && sums && <Sums outcome={verdict} ruleId={cell.ruleId} />}
+        <div>
+          {verdict && !sums && (
+            <p className="mb-2 flex flex-wrap items-baseline gap-x-3">
+              <Verdict verdict={verdict.verdict} estimated={verdict.estimated} />
+              <Margin outcome={verdict} ruleId={cell.ruleId} />
+            </p>
+          )}
+          <p className="max-w-text">
+            <strong className="font-semibold">Why.</strong> {whyFor(ruleBook.rule(cell.ruleId), sitterName)}
+          </p>
+          {verdict && sums && <Doubt outcome={verdict} />}
+          {cell.side !== undefined && <p className="mt-2 text-sm text-ink-2">At the sitter’s {cell.side}.</p>}
+          <SourceLine ruleId={cell.ruleId} />
+        </div>
+        {fixable && (
+          <div className={classNames(sums && '@min-[42rem]:@max-[60rem]:col-span-2')}>
+            <FixList cell={cell} />
+          </div>
+        )}
       </div>
-      {outcome.kind === 'verdict' && outcome.verdict !== 'fits' && <FixList cell={cell} />}
     </div>
   );
 }

@@ -31,7 +31,9 @@ export function CellContent({ cell, readAs }: { cell: FitCell; readAs?: string }
           estimated={outcome.estimated}
           margin={<Margin outcome={outcome} ruleId={cell.ruleId} />}
         />
-        {readAs !== undefined && <span className="ml-[34px] text-xs text-ink-2">{readAs}</span>}
+        {readAs !== undefined && (
+          <span className="ml-[34px] text-xs whitespace-nowrap text-ink-2">{readAs}</span>
+        )}
       </span>
     );
   }

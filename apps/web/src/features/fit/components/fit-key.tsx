@@ -11,9 +11,9 @@ export function FitKey() {
 }
 
 /** Stands under every sheet. */
-export function FitCaution() {
+export function FitCaution({ small = false }: { small?: boolean }) {
   return (
-    <p className="text-sm text-ink-2">
+    <p className={small ? 'text-xs text-ink-2' : 'text-sm text-ink-2'}>
       Guidance, not certification. Local codes, the authority having jurisdiction and licensed practice
       decide. Body data describe surveyed groups, not a person: try the seat.
     </p>

@@ -62,7 +62,13 @@ export function FitPage({ roomTo, papersAt }: FitPageProps) {
           <FitKey />
         </div>
         {!nobody && (
-          <Select label="Order" value={order} options={ORDERS} onChange={setOrder} className="w-52" />
+          <Select
+            label="Order"
+            value={order}
+            options={ORDERS}
+            onChange={setOrder}
+            className="w-52 max-tablet:hidden"
+          />
         )}
       </div>
       {nobody && (
@@ -78,17 +84,21 @@ export function FitPage({ roomTo, papersAt }: FitPageProps) {
           mannequin.
         </EmptyState>
       )}
-      <div className="overflow-x-auto bg-paper max-tablet:hidden">
-        <FitGrid order={order} showPlace showPublic />
-      </div>
+      <FitGrid
+        order={order}
+        showPlace
+        showPublic
+        ground="paper"
+        className="max-h-[calc(100dvh-2rem)] max-tablet:hidden"
+      />
       <div className="tablet:hidden">
-        <FitPeople />
+        <FitPeople showPublic />
       </div>
       <div className="mt-10">
         <PiecesAndWays />
       </div>
       <div className="mt-6 flex flex-wrap justify-between gap-x-8 gap-y-2">
-        <p className="text-sm text-ink-2">
+        <p className="text-sm text-ink-2 max-tablet:hidden">
           Arrow keys move between cells, Enter opens one, Escape closes it.
         </p>
         <FitCaution />

@@ -1,66 +1,108 @@
-import { useState } from 'react';
+import type { FitCell } from '@settlewright/anthropometry';
+import { useState, type ReactNode } from 'react';
+import { Measure } from '@/components/measure.tsx';
 import { SitterDot } from '@/components/sitter-dot.tsx';
-import { verdictTone } from '@/components/verdict.tsx';
-import { classNames } from '@/components/class-names.ts';
 import { checkName } from '../amounts.ts';
+import { troubleFirst } from '../columns.ts';
 import { useFitView } from '../fit-view.ts';
 import { CellSlip } from './cell-slip.tsx';
 import { CellContent } from './fit-cell.tsx';
 
-const SEVERITY = { wontFit: 0, notKnown: 1, tight: 2, fits: 3 } as const;
+type ListedCell = FitCell & { readAs?: string };
 
-/** The sheet on a phone: people as sections, trouble first, what fits folded away. */
-export function FitPeople() {
-  const { sheet, ruleBook, colourOf, openCellId, open } = useFitView();
-  const [unfolded, setUnfolded] = useState<ReadonlySet<string>>(new Set());
-  const rows = [...sheet.rows].sort((a, b) => SEVERITY[a.worst] - SEVERITY[b.worst]);
+const fits = ({ outcome }: FitCell) => outcome.kind === 'verdict' && outcome.verdict === 'fits';
+
+interface SectionProps {
+  name: string;
+  /** Who it is in the sentence of a slip. */
+  about: string;
+  heading: ReactNode;
+  place: string;
+  cells: readonly ListedCell[];
+}
+
+/** One person: trouble in view, what fits folded away. */
+function PersonSection({ name, about, heading, place, cells }: SectionProps) {
+  const { ruleBook, openCellId, open } = useFitView();
+  const [unfolded, setUnfolded] = useState(false);
+  const judged = cells.filter(({ outcome }) => outcome.kind === 'verdict');
+  const fitting = judged.filter(fits).length;
+  const shown = unfolded ? judged : judged.filter((cell) => !fits(cell));
+  return (
+    <section aria-label={name}>
+      <h2 className="ruled flex flex-wrap items-center gap-x-2 border-b border-b-rule py-2 font-semibold">
+        {heading}
+        <span className="ml-auto text-sm font-normal text-ink-2">{place}</span>
+      </h2>
+      <ul>
+        {shown.map((cell) => (
+          <li key={cell.id} className="border-b border-rule">
+            <button
+              type="button"
+              className="grid min-h-12 w-full grid-cols-[1fr_9.5rem] items-center gap-2 py-1 text-left"
+              aria-expanded={openCellId === cell.id}
+              onClick={() => open(openCellId === cell.id ? null : cell.id)}
+            >
+              <span>{checkName(ruleBook, cell)}</span>
+              <CellContent cell={cell} readAs={cell.readAs} />
+            </button>
+            {openCellId === cell.id && <CellSlip cell={cell} sitterName={about} />}
+          </li>
+        ))}
+      </ul>
+      {fitting > 0 && (
+        <p className="grid grid-cols-[1fr_9.5rem] items-center gap-2">
+          <span className="text-ink-2">
+            {fitting} {fitting === 1 ? 'check fits' : 'checks fit'}
+          </span>
+          <button
+            type="button"
+            aria-expanded={unfolded}
+            className="link min-h-11 justify-self-start"
+            onClick={() => setUnfolded(!unfolded)}
+          >
+            {unfolded ? 'Hide' : 'Show'}
+            <span className="sr-only"> what fits {name}</span>
+          </button>
+        </p>
+      )}
+    </section>
+  );
+}
+
+/** The sheet on a phone: people as sections, those in trouble first. */
+export function FitPeople({ showPublic = false }: { showPublic?: boolean }) {
+  const { sheet, colourOf, aside } = useFitView();
+  const publicCells = showPublic ? sheet.publicRow.cells : [];
   return (
     <div className="grid gap-6">
-      {rows.map((row) => {
-        const judged = row.cells.filter(({ outcome }) => outcome.kind === 'verdict');
-        const fitting = judged.filter(
-          ({ outcome }) => outcome.kind === 'verdict' && outcome.verdict === 'fits',
-        );
-        const shown = unfolded.has(row.placeId) ? judged : judged.filter((cell) => !fitting.includes(cell));
-        return (
-          <section key={row.placeId} aria-label={row.name}>
-            <h3 className="ruled flex items-center gap-2 pt-2 font-semibold">
+      {troubleFirst(sheet.rows).map((row) => (
+        <PersonSection
+          key={row.placeId}
+          name={row.name}
+          about={row.name}
+          place={`${row.mark}, place ${row.place}`}
+          cells={row.cells}
+          heading={
+            <>
               <SitterDot colour={colourOf(row.sitterId)} />
-              <span className={classNames('flex-1', verdictTone(row.worst))}>
-                <span className="text-ink">{row.name}</span>
-              </span>
+              <span>{row.name}</span>
               <span className="text-sm font-normal text-ink-2">
-                {row.mark}, place {row.place}
+                <Measure text={aside(row.sitterId)} />
               </span>
-            </h3>
-            <ul>
-              {shown.map((cell) => (
-                <li key={cell.id} className="border-b border-rule">
-                  <button
-                    type="button"
-                    className="grid min-h-12 w-full grid-cols-2 items-center text-left"
-                    aria-expanded={openCellId === cell.id}
-                    onClick={() => open(openCellId === cell.id ? null : cell.id)}
-                  >
-                    <span>{checkName(ruleBook, cell)}</span>
-                    <CellContent cell={cell} />
-                  </button>
-                  {openCellId === cell.id && <CellSlip cell={cell} sitterName={row.name} />}
-                </li>
-              ))}
-            </ul>
-            {fitting.length > 0 && !unfolded.has(row.placeId) && (
-              <button
-                type="button"
-                className="link min-h-11 text-sm"
-                onClick={() => setUnfolded(new Set([...unfolded, row.placeId]))}
-              >
-                {fitting.length} {fitting.length === 1 ? 'check fits' : 'checks fit'}
-              </button>
-            )}
-          </section>
-        );
-      })}
+            </>
+          }
+        />
+      ))}
+      {publicCells.length > 0 && (
+        <PersonSection
+          name="The public"
+          about="somebody of the public"
+          place="any place"
+          cells={publicCells}
+          heading={<span>The public</span>}
+        />
+      )}
     </div>
   );
 }

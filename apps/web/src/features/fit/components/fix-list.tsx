@@ -1,10 +1,10 @@
 import type { FitCell } from '@settlewright/anthropometry';
 import { formatAngle, formatLength, type CellChange, type CellState, type Fix } from '@settlewright/geometry';
-import { useMemo } from 'react';
-import { Measure } from '@/components/measure.tsx';
+import { useId } from 'react';
 import { verdictWord } from '@/components/verdict.tsx';
-import { checkName } from '../amounts.ts';
+import { checkName, shortName } from '../amounts.ts';
 import { useFitView, type FitView } from '../fit-view.ts';
+import { useFixes } from '../use-fixes.ts';
 
 function stateWords(state: CellState): string {
   if (state === 'inside' || state === 'outside') return `${state} the clause`;
@@ -15,7 +15,7 @@ function whoOf({ sheet }: FitView, change: CellChange): string {
   const row = sheet.rows.find(
     ({ sitterId, placeId }) => sitterId === change.sitterId && placeId === change.placeId,
   );
-  return row?.name.split(' ')[0] ?? (change.sitterId === undefined ? change.marks.join(', ') : 'the public');
+  return row === undefined ? change.marks.join(', ') : shortName(row.name);
 }
 
 /** "B1 seat height 18″ to 17″", in the reader's units. */
@@ -47,45 +47,46 @@ function ChangeWords({ changes, tone }: { changes: readonly CellChange[]; tone: 
   );
 }
 
+function FixLine({ fix }: { fix: Fix }) {
+  const view = useFitView();
+  const words = fixWords(fix, view);
+  return (
+    <li className="flex gap-4 border-b border-rule py-2 last:border-0">
+      <div className="min-w-0 flex-1">
+        <p className="text-sm font-semibold">{words}</p>
+        <ChangeWords changes={fix.gains} tone="text-ink-2" />
+        <ChangeWords changes={fix.losses} tone="text-wont" />
+        {fix.losses.length === 0 && <p className="text-sm text-ink-2">Nobody else changes for the worse.</p>}
+      </div>
+      {view.take !== undefined && (
+        <button type="button" className="link min-h-8 self-start text-sm" onClick={() => view.take?.(fix)}>
+          Try it<span className="sr-only">: {words}</span>
+        </button>
+      )}
+    </li>
+  );
+}
+
 /** What would change one verdict, with who gains and who loses by it. */
 export function FixList({ cell }: { cell: FitCell }) {
-  const view = useFitView();
-  const { fixesFor, take } = view;
-  const fixes = useMemo<Fix[]>(() => fixesFor?.(cell) ?? [], [fixesFor, cell]);
-  if (fixesFor === undefined) return null;
+  const fixes = useFixes(cell);
+  const headed = useId();
   return (
     <div>
-      <h4 className="border-b border-rule pb-1 font-semibold">What would change it, and for whom</h4>
-      {fixes.length === 0 && (
+      <p id={headed} className="border-b border-rule pb-1 font-semibold">
+        What would change it, and for whom
+      </p>
+      {fixes === undefined && <p className="late pt-2 text-sm text-ink-2">Working it out</p>}
+      {fixes?.length === 0 && (
         <p className="pt-2 text-sm text-ink-2">No single number changes this without leaving its limits.</p>
       )}
-      <ul>
-        {fixes.map((fix) => {
-          const words = fixWords(fix, view);
-          return (
-            <li
-              key={`${fix.pieceId}|${fix.key}`}
-              className="flex gap-4 border-b border-rule py-2 last:border-0"
-            >
-              <div className="min-w-0 flex-1">
-                <p className="text-sm font-semibold">
-                  <Measure text={words} />
-                </p>
-                <ChangeWords changes={fix.gains} tone="text-ink-2" />
-                <ChangeWords changes={fix.losses} tone="text-wont" />
-                {fix.losses.length === 0 && (
-                  <p className="text-sm text-ink-2">Nobody else changes for the worse.</p>
-                )}
-              </div>
-              {take !== undefined && (
-                <button type="button" className="link min-h-8 self-start text-sm" onClick={() => take(fix)}>
-                  Try it<span className="sr-only">: {words}</span>
-                </button>
-              )}
-            </li>
-          );
-        })}
-      </ul>
+      {fixes !== undefined && fixes.length > 0 && (
+        <ul aria-labelledby={headed}>
+          {fixes.map((fix) => (
+            <FixLine key={`${fix.pieceId}|${fix.label}|${fix.toValue}`} fix={fix} />
+          ))}
+        </ul>
+      )}
     </div>
   );
 }

@@ -1,0 +1,105 @@
+import { type VerdictOutcome } from '@settlewright/anthropometry';
+import { Measure } from '@/components/measure.tsx';
+import { Verdict, verdictTone } from '@/components/verdict.tsx';
+import { amountText, measureWords, REMOVED } from '../amounts.ts';
+import { useFitView } from '../fit-view.ts';
+import { marginSum } from '../sums.ts';
+import { Margin } from './fit-cell.tsx';
+import { Ledger } from './ledger.tsx';
+
+interface Props {
+  outcome: VerdictOutcome;
+  ruleId: string;
+}
+
+/** Lines of a rule in words: "Fits up to 16⅜″; tight up to 17⅜″." */
+function LimitWords({ outcome, ruleId }: Props) {
+  const { ruleBook, style } = useFitView();
+  const { unit } = ruleBook.rule(ruleId);
+  const words = (name: string, { lower, upper }: VerdictOutcome['pass']) => {
+    const from = lower === undefined ? undefined : amountText(lower, unit, style);
+    const to = upper === undefined ? undefined : amountText(upper, unit, style);
+    if (from === undefined && to === undefined) return [];
+    if (from !== undefined && to !== undefined) return [`${name} ${from} to ${to}`];
+    return [to === undefined ? `${name} from ${from ?? ''}` : `${name} up to ${to}`];
+  };
+  const lines = [...words('fits', outcome.pass), ...words('tight', outcome.fail)];
+  if (lines.length === 0) return null;
+  return (
+    <p className="text-sm text-ink-2">
+      {lines.map((line, index) => (
+        <span key={line}>
+          {index > 0 && ', '}
+          <Measure text={line} />
+        </span>
+      ))}
+    </p>
+  );
+}
+
+/** The verdict and how its margin follows from the line and the value. */
+function MarginLine({ outcome, ruleId }: Props) {
+  const { ruleBook, style } = useFitView();
+  const { unit } = ruleBook.rule(ruleId);
+  const sum = typeof outcome.margin === 'number' ? marginSum(outcome, unit, style) : undefined;
+  const show = (value: number) => <Measure text={amountText(value, unit, style)} />;
+  return (
+    <div className="flex flex-wrap items-baseline justify-between gap-x-6 border-t border-ink pt-2">
+      <Verdict verdict={outcome.verdict} estimated={outcome.estimated} className="whitespace-nowrap" />
+      <p className="text-lg font-light whitespace-nowrap">
+        {sum && (
+          <>
+            {show(sum.from)} − {show(sum.take)} {sum.exact ? '=' : '≈'}{' '}
+          </>
+        )}
+        <span className={`text-2xl tracking-hero ${verdictTone(outcome.verdict)}`}>
+          <Margin outcome={outcome} ruleId={ruleId} />
+        </span>
+      </p>
+    </div>
+  );
+}
+
+/** The sum behind a verdict as two small ledgers that close to the margin. */
+export function Sums({ outcome, ruleId }: Props) {
+  const { ruleBook } = useFitView();
+  const { unit } = ruleBook.rule(ruleId);
+  if (typeof outcome.value !== 'number') {
+    return (
+      <div className="grid content-start gap-2">
+        <Verdict verdict={outcome.verdict} estimated={outcome.estimated} />
+        <p className="text-sm text-ink-2">
+          The numbers behind it are {REMOVED}: they told of a person who is no longer in the cast.
+        </p>
+      </div>
+    );
+  }
+  return (
+    <div className="grid content-start gap-3">
+      <div className="grid grid-cols-2 items-start gap-6 max-phone:grid-cols-1 max-phone:gap-3">
+        <Ledger caption="The body" lines={outcome.bodyLedger} unit={unit} />
+        <Ledger caption="The set" lines={outcome.setLedger} unit={unit} />
+      </div>
+      <MarginLine outcome={outcome} ruleId={ruleId} />
+      <LimitWords outcome={outcome} ruleId={ruleId} />
+    </div>
+  );
+}
+
+/** How sure a predicted verdict is, and which measure would settle it. */
+export function Doubt({ outcome }: { outcome: VerdictOutcome }) {
+  if (!outcome.estimated || typeof outcome.margin !== 'number') return null;
+  const inHundred = (probability: number) => Math.round(probability * 100);
+  return (
+    <p className="mt-2 text-sm text-ink-2">
+      Predicted, not measured: {inHundred(outcome.probability.pass)} in 100 such people fit,{' '}
+      {inHundred(outcome.probability.insideFail)} in 100 are at least tight.
+      {outcome.settleWith.length > 0 && (
+        <strong className="font-semibold text-ink">
+          {' '}
+          To settle it, measure {measureWords(outcome.settleWith.slice(0, 2))}.
+        </strong>
+      )}
+    </p>
+  );
+}

@@ -1,0 +1,69 @@
+import type { LedgerLine, RuleUnit, VerdictOutcome } from '@settlewright/anthropometry';
+import { lengthStep, type LengthStyle } from '@settlewright/geometry';
+
+/** The smallest difference that a number of a check can show. */
+function stepOf(unit: RuleUnit, style: LengthStyle): number {
+  return unit === 'mm' ? lengthStep({ ...style, feet: false }) : unit === 'deg' ? 0.1 : 1;
+}
+
+/**
+ * A ledger whose shown figures add up: totals are rounded as they stand, and what rounding the terms
+ * loses goes to those that were rounded most.
+ */
+export function closedLedger(
+  lines: readonly LedgerLine[],
+  unit: RuleUnit,
+  style: LengthStyle,
+): readonly LedgerLine[] {
+  const step = stepOf(unit, style);
+  const inSteps = lines.map(({ value }) => Math.round(value / step));
+  let exact = 0;
+  let shown = 0;
+  let open: number[] = [];
+  for (const [index, line] of lines.entries()) {
+    if (line.kind === 'term') {
+      exact += line.value;
+      shown += inSteps[index] ?? 0;
+      open.push(index);
+      continue;
+    }
+    // A total that is no sum of the lines above it stands as it is.
+    if (Math.abs(exact - line.value) > step / 2) return lines;
+    const missing = (inSteps[index] ?? 0) - shown;
+    const lost = (at: number) => (lines[at]?.value ?? 0) / step - (inSteps[at] ?? 0);
+    const most = [...open].sort((a, b) => Math.sign(missing) * (lost(b) - lost(a)));
+    for (const at of most.slice(0, Math.abs(missing))) inSteps[at] = (inSteps[at] ?? 0) + Math.sign(missing);
+    shown = inSteps[index] ?? 0;
+    open = [];
+  }
+  return lines.map((line, index) => ({ ...line, value: (inSteps[index] ?? 0) * step }));
+}
+
+/** How the margin follows from the fail line that decides and the value. */
+export interface MarginSum {
+  from: number;
+  take: number;
+  /** False where the figures as shown, each rounded, do not close to the last one. */
+  exact: boolean;
+}
+
+/** "17⅜″ − 18¼″": the fail line nearest to the value decides, from above or from below. */
+export function marginSum(
+  outcome: Pick<VerdictOutcome, 'value' | 'fail' | 'margin' | 'marginRange'>,
+  unit: RuleUnit,
+  style: LengthStyle,
+): MarginSum | undefined {
+  const { value, fail, margin, marginRange } = outcome;
+  const step = stepOf(unit, style);
+  const sides = [
+    ...(fail.upper === undefined ? [] : [{ from: fail.upper, take: value }]),
+    ...(fail.lower === undefined ? [] : [{ from: value, take: fail.lower }]),
+  ];
+  const side = sides.find(({ from, take }) => Math.abs(from - take - margin) < step / 2);
+  if (side === undefined) return undefined;
+  const steps = (amount: number) => Math.round(amount / step);
+  return {
+    ...side,
+    exact: marginRange === undefined && steps(side.from) - steps(side.take) === steps(margin),
+  };
+}
