@@ -1,3 +1,4 @@
+import { createSecretKey } from 'node:crypto';
 import { Injectable } from '@nestjs/common';
 import { PassportStrategy } from '@nestjs/passport';
 import { ExtractJwt, Strategy } from 'passport-jwt';
@@ -11,9 +12,12 @@ export class JwtStrategy extends PassportStrategy(Strategy, 'jwt') {
     @InjectSettings() config: Settings,
     private readonly sessions: SessionsService,
   ) {
+    // Ready made: from a string each request would try the kinds of key one after another. The typings know
+    // only text and buffers; the library below them takes a key object.
+    const key = createSecretKey(config.jwtSecret, 'utf8') as unknown as Buffer;
     super({
       jwtFromRequest: ExtractJwt.fromAuthHeaderAsBearerToken(),
-      secretOrKey: config.jwtSecret,
+      secretOrKeyProvider: (_request, _token, done) => done(null, key),
       algorithms: ['HS256'],
     });
   }

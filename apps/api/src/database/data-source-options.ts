@@ -15,7 +15,7 @@ export function dataSourceOptions(databaseUrl: string): DataSourceOptions {
     migrationsRun: false,
     uuidExtension: 'pgcrypto',
     installExtensions: false,
-    poolSize: 10,
+    poolSize: 20,
     extra: { connectionTimeoutMillis: 10_000 },
   };
 }

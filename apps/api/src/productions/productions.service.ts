@@ -10,6 +10,10 @@ import { readPage } from '../common/read-page';
 import type { CreateProductionDto, PatchProductionDto, ProductionQuery } from './dto/production.dto';
 import { Production } from './entities/production.entity';
 
+export function productionArchived(): Problem {
+  return Problem.conflict('production-archived', 'This production is archived. Restore it to change it.');
+}
+
 @Injectable()
 export class ProductionsService {
   constructor(
@@ -27,9 +31,7 @@ export class ProductionsService {
   /** As `forReading`, and the production is not put away. */
   async forChanging(member: MemberInfo, productionId: string): Promise<Production> {
     const production = await this.forReading(member, productionId);
-    if (production.archivedAt) {
-      throw Problem.conflict('production-archived', 'This production is archived. Restore it to change it.');
-    }
+    if (production.archivedAt) throw productionArchived();
     return production;
   }
 

@@ -7,7 +7,7 @@ import type { MemberInfo } from '../common/access.decorator';
 import { Problem } from '../common/problem';
 import { FitCheckService } from '../fit-checks/fit-check.service';
 import { DraftDto, type SaveDraftDto } from './dto/draft.dto';
-import type { DesignedSet } from './entities/designed-set.entity';
+import { DesignedSet } from './entities/designed-set.entity';
 import { type Counts, SetDraft } from './entities/set-draft.entity';
 import { readSentDocument } from './sent-document';
 import { castIdsOf, SeatedPeople } from './seated-people.service';
@@ -40,13 +40,30 @@ export class DraftsService {
     await this.access.forChanging(member, productionId, setId);
     const document = await this.readSent(productionId, sent);
     return this.drafts.manager.transaction(async (manager) => {
-      const set = await this.access.locked(manager, setId);
-      if (set.draftNumber !== baseNumber) throw await this.conflict(manager, set, baseNumber);
-      set.draftNumber += 1;
-      await manager.save(set);
-      await this.keep(manager, member, set, document);
-      await manager.delete(SetDraft, { setId, number: LessThanOrEqual(set.draftNumber - KEPT_DRAFTS) });
-      return find(manager, set.id, set.draftNumber);
+      // One statement compares, counts on and keeps other writers off until the transaction ends.
+      const { affected } = await manager
+        .createQueryBuilder()
+        .update(DesignedSet)
+        .set({ draftNumber: () => 'draft_number + 1' })
+        .where('id = :setId AND draft_number = :baseNumber', { setId, baseNumber })
+        .execute();
+      if (affected !== 1)
+        throw await this.conflict(manager, await this.access.locked(manager, setId), baseNumber);
+      const number = baseNumber + 1;
+      await this.keep(manager, member, { id: setId, productionId, draftNumber: number }, document);
+      await manager.delete(SetDraft, { setId, number: LessThanOrEqual(number - KEPT_DRAFTS) });
+      const saved = await manager.findOneOrFail(SetDraft, {
+        where: { setId, number },
+        relations: { savedBy: true },
+        select: {
+          setId: true,
+          number: true,
+          savedAt: true,
+          savedById: true,
+          savedBy: { id: true, name: true },
+        },
+      });
+      return { ...saved, document };
     });
   }
 
@@ -59,7 +76,7 @@ export class DraftsService {
   async keep(
     manager: EntityManager,
     member: MemberInfo,
-    set: DesignedSet,
+    set: Pick<DesignedSet, 'id' | 'productionId' | 'draftNumber'>,
     document: SetDocument,
   ): Promise<void> {
     const counts = await this.count(set.productionId, document, manager);

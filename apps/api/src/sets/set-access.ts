@@ -3,7 +3,7 @@ import { InjectRepository } from '@nestjs/typeorm';
 import type { EntityManager, Repository } from 'typeorm';
 import type { MemberInfo } from '../common/access.decorator';
 import { Problem } from '../common/problem';
-import { ProductionsService } from '../productions/productions.service';
+import { productionArchived, ProductionsService } from '../productions/productions.service';
 import { DesignedSet } from './entities/designed-set.entity';
 
 /** Finds a set by its whole path: workshop, production, set. Anything else does not exist for the caller. */
@@ -15,18 +15,38 @@ export class SetAccess {
   ) {}
 
   async forReading(member: MemberInfo, productionId: string, setId: string): Promise<DesignedSet> {
-    await this.productions.forReading(member, productionId);
-    const set = await this.sets.findOneBy({ id: setId, productionId });
-    if (!set) throw Problem.notFound('set');
-    return set;
+    return this.found(await this.withProduction(member, productionId, setId), member, productionId);
   }
 
   async forChanging(member: MemberInfo, productionId: string, setId: string): Promise<DesignedSet> {
-    await this.productions.forChanging(member, productionId);
     const set = await this.forReading(member, productionId, setId);
-    if (set.archivedAt)
+    if (set.production?.archivedAt) throw productionArchived();
+    if (set.archivedAt) {
       throw Problem.conflict('set-archived', 'This set is archived. Restore it to change it.');
+    }
     return set;
+  }
+
+  private withProduction(
+    member: MemberInfo,
+    productionId: string,
+    setId: string,
+  ): Promise<DesignedSet | null> {
+    return this.sets.findOne({
+      where: { id: setId, productionId, production: { workshopId: member.workshopId } },
+      relations: { production: true },
+    });
+  }
+
+  /** Says which part of the path leads nowhere. */
+  private async found(
+    set: DesignedSet | null,
+    member: MemberInfo,
+    productionId: string,
+  ): Promise<DesignedSet> {
+    if (set) return set;
+    await this.productions.forReading(member, productionId);
+    throw Problem.notFound('set');
   }
 
   /** The set as it is now, kept from other writers until the transaction ends. */
