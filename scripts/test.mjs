@@ -75,7 +75,7 @@ async function journeys() {
   if (!(await untilReady(product.api, product.address))) return { name: 'journeys', passed: 0, failed: 1 };
   return suite('journeys', vitest('vitest.e2e.config.ts'), {
     cwd: path.join(root, 'apps/web'),
-    env: { BASE_URL: product.address, MAIL_URL: product.mail.page },
+    env: { PRODUCT_URL: product.address, MAIL_URL: product.mail.page },
   });
 }
 

@@ -18,7 +18,7 @@ const KNOWN_WARNINGS = [/GPU stall due to ReadPixels/, /THREE\.Clock/, /PCFSoftS
 export const DESK = { width: 1440, height: 900 };
 export const PHONE = { width: 390, height: 844 };
 
-export function environment(name: 'BASE_URL' | 'MAIL_URL'): string {
+export function environment(name: 'PRODUCT_URL' | 'MAIL_URL'): string {
   const value = process.env[name];
   if (value === undefined) throw new Error(`${name} is not set: run the journeys with npm test -- journeys.`);
   return value;
@@ -34,10 +34,11 @@ export async function openVisitor(
 ): Promise<{ context: BrowserContext; page: Page; complaints: string[] }> {
   const context = await browser.newContext({
     viewport,
-    baseURL: environment('BASE_URL'),
+    baseURL: environment('PRODUCT_URL'),
     reducedMotion: 'reduce',
     acceptDownloads: true,
   });
+  context.setDefaultTimeout(15_000);
   const page = await context.newPage();
   const complaints: string[] = [];
   page.on('console', (message) => {

@@ -145,7 +145,8 @@ export function NumberFlag({ pieceId, parameter, look, slipId, onHand, onNext }:
           data-number={parameter.key}
           onClick={() => begin()}
           onKeyDown={buttonKeys}
-          onFocus={() => setHeld(true)}
+          // The slip moves the sentence: shown at the press already, it would take the number from under the hand.
+          onFocus={(event) => setHeld(event.currentTarget.matches(':focus-visible'))}
           onBlur={() => setHeld(false)}
           className={classNames(
             'quick inline-block rounded-sm border-[1.25px] border-chalk bg-sheet text-center font-semibold text-chalk hover:bg-chalk-wash',
