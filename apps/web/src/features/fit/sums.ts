@@ -8,15 +8,21 @@ function stepOf(unit: RuleUnit, style: LengthStyle): number {
 
 /**
  * A ledger whose shown figures add up: totals are rounded as they stand, and what rounding the terms
- * loses goes to those that were rounded most.
+ * loses goes to those that were rounded most. A total that a sum further down needs otherwise is given
+ * as `closesTo`.
  */
 export function closedLedger(
   lines: readonly LedgerLine[],
   unit: RuleUnit,
   style: LengthStyle,
+  closesTo?: Shown,
 ): readonly LedgerLine[] {
   const step = stepOf(unit, style);
-  const inSteps = lines.map(({ value }) => Math.round(value / step));
+  const inSteps = lines.map(({ value, kind }) =>
+    kind === 'total' && closesTo !== undefined && Math.abs(value - closesTo.exact) < step / 100
+      ? Math.round(closesTo.shown / step)
+      : Math.round(value / step),
+  );
   let exact = 0;
   let shown = 0;
   let open: number[] = [];
@@ -39,15 +45,21 @@ export function closedLedger(
   return lines.map((line, index) => ({ ...line, value: (inSteps[index] ?? 0) * step }));
 }
 
-/** How the margin follows from the fail line that decides and the value. */
-export interface MarginSum {
-  from: number;
-  take: number;
-  /** False where the figures as shown, each rounded, do not close to the last one. */
-  exact: boolean;
+/** A number and the figure it is shown as. */
+export interface Shown {
+  exact: number;
+  shown: number;
 }
 
-/** "17⅜″ − 18¼″": the fail line nearest to the value decides, from above or from below. */
+/** How the margin follows from the fail line that decides and the value. */
+export interface MarginSum {
+  from: Shown;
+  take: Shown;
+  /** False for a prediction, whose margin is rounded to what is known. */
+  closes: boolean;
+}
+
+/** "17⅜″ − 18⅛″": the fail line nearest to the value decides, from above or from below. */
 export function marginSum(
   outcome: Pick<VerdictOutcome, 'value' | 'fail' | 'margin' | 'marginRange'>,
   unit: RuleUnit,
@@ -61,9 +73,19 @@ export function marginSum(
   ];
   const side = sides.find(({ from, take }) => Math.abs(from - take - margin) < step / 2);
   if (side === undefined) return undefined;
-  const steps = (amount: number) => Math.round(amount / step);
+  const rounded = (amount: number) => Math.round(amount / step);
+  let [from, take] = [rounded(side.from), rounded(side.take)];
+  // Each of three figures is rounded by itself; the one that was rounded most gives way by one step.
+  const missing = rounded(margin) - (from - take);
+  if (marginRange === undefined && Math.abs(missing) === 1) {
+    const lostFrom = (side.from / step - from) * missing;
+    const lostTake = (take - side.take / step) * missing;
+    if (lostFrom > lostTake) from += missing;
+    else take -= missing;
+  }
   return {
-    ...side,
-    exact: marginRange === undefined && steps(side.from) - steps(side.take) === steps(margin),
+    from: { exact: side.from, shown: from * step },
+    take: { exact: side.take, shown: take * step },
+    closes: marginRange === undefined && from - take === rounded(margin),
   };
 }

@@ -7,13 +7,15 @@ import { Doubt, Sums } from './cell-sums.tsx';
 import { Margin } from './fit-cell.tsx';
 import { FixList } from './fix-list.tsx';
 
+const asSentence = (text: string) => `${text.charAt(0).toUpperCase()}${text.slice(1).replace(/\.$/, '')}.`;
+
 /** Where a limit comes from, in the same words on screen and paper. */
 function SourceLine({ ruleId }: { ruleId: string }) {
   const { ruleBook } = useFitView();
   const rule = ruleBook.rule(ruleId);
   return (
     <p className="mt-2 text-sm break-words text-ink-2">
-      Rule {rule.id}, {rule.sourceWord}. {rule.thresholdBasis.replace(/\.$/, '')}.{' '}
+      Rule {rule.id}, {rule.sourceWord}. {asSentence(rule.thresholdBasis)}{' '}
       {rule.sources.map(({ cite, mark }, index) => (
         <span key={cite}>
           {index > 0 && '; '}

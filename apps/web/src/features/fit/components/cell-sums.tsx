@@ -1,9 +1,9 @@
-import { type VerdictOutcome } from '@settlewright/anthropometry';
+import type { VerdictOutcome } from '@settlewright/anthropometry';
 import { Measure } from '@/components/measure.tsx';
 import { Verdict, verdictTone } from '@/components/verdict.tsx';
 import { amountText, measureWords, REMOVED } from '../amounts.ts';
 import { useFitView } from '../fit-view.ts';
-import { marginSum } from '../sums.ts';
+import { marginSum, type MarginSum } from '../sums.ts';
 import { Margin } from './fit-cell.tsx';
 import { Ledger } from './ledger.tsx';
 
@@ -38,10 +38,9 @@ function LimitWords({ outcome, ruleId }: Props) {
 }
 
 /** The verdict and how its margin follows from the line and the value. */
-function MarginLine({ outcome, ruleId }: Props) {
+function MarginLine({ outcome, ruleId, sum }: Props & { sum: MarginSum | undefined }) {
   const { ruleBook, style } = useFitView();
   const { unit } = ruleBook.rule(ruleId);
-  const sum = typeof outcome.margin === 'number' ? marginSum(outcome, unit, style) : undefined;
   const show = (value: number) => <Measure text={amountText(value, unit, style)} />;
   return (
     <div className="flex flex-wrap items-baseline justify-between gap-x-6 border-t border-ink pt-2">
@@ -49,7 +48,7 @@ function MarginLine({ outcome, ruleId }: Props) {
       <p className="text-lg font-light whitespace-nowrap">
         {sum && (
           <>
-            {show(sum.from)} − {show(sum.take)} {sum.exact ? '=' : '≈'}{' '}
+            {show(sum.from.shown)} − {show(sum.take.shown)} {sum.closes ? '=' : '≈'}{' '}
           </>
         )}
         <span className={`text-2xl tracking-hero ${verdictTone(outcome.verdict)}`}>
@@ -62,7 +61,7 @@ function MarginLine({ outcome, ruleId }: Props) {
 
 /** The sum behind a verdict as two small ledgers that close to the margin. */
 export function Sums({ outcome, ruleId }: Props) {
-  const { ruleBook } = useFitView();
+  const { ruleBook, style } = useFitView();
   const { unit } = ruleBook.rule(ruleId);
   if (typeof outcome.value !== 'number') {
     return (
@@ -74,13 +73,16 @@ export function Sums({ outcome, ruleId }: Props) {
       </div>
     );
   }
+  const sum = marginSum(outcome, unit, style);
+  const valueFirst = sum?.from.exact === outcome.value;
+  const [value, line] = valueFirst ? [sum?.from, sum?.take] : [sum?.take, sum?.from];
   return (
     <div className="grid content-start gap-3">
       <div className="grid grid-cols-2 items-start gap-6 max-phone:grid-cols-1 max-phone:gap-3">
-        <Ledger caption="The body" lines={outcome.bodyLedger} unit={unit} />
-        <Ledger caption="The set" lines={outcome.setLedger} unit={unit} />
+        <Ledger caption="The body" lines={outcome.bodyLedger} unit={unit} closesTo={line} />
+        <Ledger caption="The set" lines={outcome.setLedger} unit={unit} closesTo={value} />
       </div>
-      <MarginLine outcome={outcome} ruleId={ruleId} />
+      <MarginLine outcome={outcome} ruleId={ruleId} sum={sum} />
       <LimitWords outcome={outcome} ruleId={ruleId} />
     </div>
   );

@@ -61,7 +61,7 @@ export function FitFoot({ isOpen, onToggle, shortcut, line, pageTo }: FitFootPro
         <section
           id="fit-drawer"
           aria-label="Fit sheet"
-          className="mx-auto flex h-[300px] max-h-[50dvh] max-w-[90rem] flex-col px-8 max-tablet:h-auto max-tablet:max-h-[70dvh] max-tablet:overflow-y-auto max-tablet:px-4 max-tablet:pb-4"
+          className="mx-auto flex h-[330px] max-h-[50dvh] max-w-[90rem] flex-col px-8 max-tablet:h-auto max-tablet:max-h-[70dvh] max-tablet:overflow-y-auto max-tablet:px-4 max-tablet:pb-4"
         >
           <FitGrid ground="sheet" className="min-h-0 flex-1 max-tablet:hidden" />
           <div className="tablet:hidden">

@@ -78,7 +78,7 @@ export function FitGrid({ order = 'place', showPlace, showPublic, ground, classN
       <table
         ref={table}
         role="grid"
-        className="w-full min-w-max border-separate border-spacing-0"
+        className="w-full min-w-max border-separate border-spacing-0 border-b border-ink"
         onKeyDown={onKeyDown}
       >
         <caption className="sr-only">Fit sheet: sitters against checks</caption>
@@ -144,7 +144,7 @@ export function FitGrid({ order = 'place', showPlace, showPublic, ground, classN
           })}
           {publicCells.length > 0 && (
             <tr>
-              <th scope="row" className={classNames(FROZEN, 'z-[5] border-b border-ink font-medium')}>
+              <th scope="row" className={classNames(FROZEN, 'z-[5] border-b border-rule font-medium')}>
                 The public <span className="text-sm font-normal text-ink-2">5th or 95th in 100</span>
               </th>
               {showPlace && <td className="border-b border-rule pr-2 text-sm text-ink-2">any place</td>}

@@ -67,7 +67,7 @@ export function GridCell({ cell, name, column, position, tabStop, turned, onReac
         aria-label={`${name}, ${check}, ${words}`}
         aria-expanded={isOpen}
         className={classNames(
-          'quick flex min-h-12 w-full items-center border-t-[3px] px-2 pb-[3px] text-left hover:bg-sunk',
+          'quick flex min-h-11 w-full items-center border-t-[3px] px-2 pb-[3px] text-left hover:bg-sunk',
           'focus-visible:relative focus-visible:z-[1]',
           edge,
           ground,

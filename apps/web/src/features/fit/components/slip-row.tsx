@@ -24,7 +24,7 @@ export function SlipRow({ cell, about, name, span }: SlipRowProps) {
         <section
           ref={section}
           aria-label={`${name}, ${ruleBook.rule(cell.ruleId).columnName.toLowerCase()}`}
-          className="sticky left-0 w-[100cqi] scroll-mt-24"
+          className="sticky left-0 z-[6] w-[100cqi] scroll-mt-24"
         >
           <CellSlip cell={cell} sitterName={about} />
         </section>
