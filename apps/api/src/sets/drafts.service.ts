@@ -79,13 +79,13 @@ export class DraftsService {
     set: Pick<DesignedSet, 'id' | 'productionId' | 'draftNumber'>,
     document: SetDocument,
   ): Promise<void> {
-    const counts = await this.count(set.productionId, document, manager);
     await manager.insert(SetDraft, {
       setId: set.id,
       number: set.draftNumber,
       document,
-      counts,
-      countedAt: () => 'now()',
+      // Counted when somebody looks at the list: far fewer look than save.
+      counts: null,
+      countedAt: new Date(0),
       savedById: member.userId,
     });
   }
@@ -123,7 +123,7 @@ export class DraftsService {
     for (const draft of found) {
       const ids = new Set(castIdsOf(draft.document));
       const changes = people.filter(({ id }) => ids.has(id)).map(({ updatedAt }) => updatedAt.getTime());
-      const changedAt = Math.max(0, ...changes);
+      const changedAt = Math.max(draft.savedAt.getTime(), ...changes);
       if (draft.countedAt.getTime() >= changedAt) continue;
       draft.counts = this.countsOf(draft.document, people.map(castPerson));
       draft.countedAt = new Date(changedAt);
@@ -133,15 +133,7 @@ export class DraftsService {
     return new Map(found.map((draft) => [draft.setId, draft]));
   }
 
-  private async count(
-    productionId: string,
-    document: SetDocument,
-    manager: EntityManager,
-  ): Promise<Counts | null> {
-    return this.countsOf(document, (await this.people.of(productionId, [document], manager)).map(castPerson));
-  }
-
-  /** A save is never lost because its checks could not be made. */
+  /** A list is never lost because the checks of one set could not be made. */
   private countsOf(document: SetDocument, people: CastPerson[]): Counts | null {
     try {
       return this.fit.sheetFor(document, people).counts;

@@ -30,11 +30,11 @@ export class SetDraft {
   @Column('jsonb')
   document: SetDocument;
 
-  /** Verdicts of the fit sheet at the time of saving; null when it could not be made. */
+  /** Verdicts of the fit sheet when the list last asked; null when not asked yet or not to be made. */
   @Column({ type: 'jsonb', nullable: true })
   counts: Counts | null;
 
-  /** People may have been measured anew since; the counts are then made again. */
+  /** Counts older than the draft, or than what is known of its people, are made again. */
   @Column('timestamptz')
   countedAt: Date;
 
