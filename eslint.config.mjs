@@ -39,8 +39,8 @@ export default tseslint.config(
     languageOptions: { globals: globals.node },
   },
   {
-    files: ['apps/web/public/**/*.js'],
-    languageOptions: { globals: globals.browser },
+    files: ['apps/web/public/**/*.js', 'bench/room-scene.mjs'],
+    languageOptions: { globals: { ...globals.node, ...globals.browser } },
   },
   prettier,
 );

@@ -17,16 +17,19 @@ export async function openProduct({ demo = false } = {}) {
     if (!response.ok) throw new Error(`${method} ${path}: ${response.status} ${JSON.stringify(answer)}`);
     return answer;
   };
+  const email = `bench-${Date.now()}@workshop.example`;
+  const password = 'a long enough password';
+  const workshopName = 'Bench workshop';
   const session = await call('POST', '/auth/sign-up', {
     name: 'Bench Keeper',
-    email: `bench-${Date.now()}@workshop.example`,
-    password: 'a long enough password',
-    workshopName: 'Bench workshop',
+    email,
+    password,
+    workshopName,
   });
   token = session.accessToken;
   const close = async () => {
     await stopChildren();
     await product.database.stop();
   };
-  return { ...product, call, token, workshopId: session.workshops[0].id, close };
+  return { ...product, call, email, password, token, workshopId: session.workshops[0].id, close };
 }
