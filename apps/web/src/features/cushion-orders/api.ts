@@ -73,6 +73,9 @@ export const useWriteMessage = (path: OrderPath) =>
 export const useLinkStep = (path: OrderPath) =>
   useOrderChange(path, (step: 'renew' | 'revoke') => api.post(`${orderAddress(path)}/link/${step}`));
 
+export const useMailAgain = (path: OrderPath) =>
+  useOrderChange(path, () => api.post(`${orderAddress(path)}/mail/send-again`));
+
 export function useCreateOrder(workshopId: string, productionId: string) {
   const client = useQueryClient();
   return useMutation({
@@ -118,7 +121,8 @@ export function useAddUpholsterer(workshopId: string) {
   });
 }
 
-const publicKey = (token: string) => ['order-link', token] as const;
+/** Where the order behind a private link is kept. */
+export const publicKey = (token: string) => ['order-link', token] as const;
 const publicAddress = (token: string) => `/link/${encodeURIComponent(token)}`;
 
 export const usePublicOrder = (token: string) =>
@@ -137,8 +141,8 @@ function usePublicStep<Input>(token: string, step: (input: Input) => Promise<Pub
 }
 
 export const useAcknowledge = (token: string) =>
-  usePublicStep(token, (name: string) =>
-    api.post<PublicOrder>(`${publicAddress(token)}/acknowledge`, { name }, { anonymous: true }),
+  usePublicStep(token, (answer: { name: string; sentAt: string }) =>
+    api.post<PublicOrder>(`${publicAddress(token)}/acknowledge`, answer, { anonymous: true }),
   );
 
 export const useReply = (token: string) =>

@@ -41,6 +41,15 @@ export interface OrderEvent {
   note: string;
 }
 
+/** What happened where no new state says it. */
+export const EVENT_WORDS: Partial<Record<string, string>> = {
+  created: 'Order begun',
+  sent: 'Sent',
+  acknowledged: 'Can make it as drawn',
+  'link-renewed': 'A new private link was mailed',
+  'link-revoked': 'The private link was revoked',
+};
+
 export interface OrderMessage {
   id?: string;
   side: 'workshop' | 'upholsterer';

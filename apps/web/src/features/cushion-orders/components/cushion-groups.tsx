@@ -7,8 +7,8 @@ import type { OrderSpec } from '../order.ts';
 import { CushionDrawing } from './cushion-drawing.tsx';
 
 const HAND_WORDS: Record<CushionSpec['hand'], string> = {
-  left: 'left hand as sat in',
-  right: 'right hand as sat in',
+  left: 'left hand',
+  right: 'right hand',
   either: 'either hand',
 };
 
@@ -44,7 +44,7 @@ function Facts({ spec, words }: { spec: CushionSpec; words: OrderSpec }) {
   const { cut, foam, buttons } = spec;
   const show = (mm: number) => <Measure text={format.length(mm)} />;
   return (
-    <dl>
+    <dl className="grid content-start gap-x-8 border-t border-rule @min-[36rem]:@max-[54rem]:grid-cols-2">
       <Row name="Place">
         {show(spec.placeMm.widthMm)} × {show(spec.placeMm.depthMm)}, wood to wood
       </Row>
@@ -77,58 +77,62 @@ function Facts({ spec, words }: { spec: CushionSpec; words: OrderSpec }) {
   );
 }
 
+/** Length that a number takes on the plan, for a plan about as wide as the column. */
+const NUMBER_OF_WIDTH = 0.09;
+
 function Group({ group, words }: { group: CushionGroup; words: OrderSpec }) {
   const { spec, marks, mirroredMarks } = group;
-  const drawing = useMemo(() => cushionDrawing(spec), [spec]);
+  const { widthMm, depthMm, thicknessMm } = spec.finishedMm;
+  const drawing = useMemo(
+    () => cushionDrawing(spec, { labelMm: NUMBER_OF_WIDTH * Math.max(widthMm, depthMm) }),
+    [spec, widthMm, depthMm],
+  );
+  const first = marks[0] ?? '';
+  const seat = spec.kind === 'seat';
   return (
-    <section className="ruled grid gap-x-10 gap-y-4 pt-3 pb-10 desk:grid-cols-[17.5rem_1fr]">
-      <div>
-        <h3 className="flex flex-wrap items-center gap-2 font-semibold">
-          {marks.map((mark) => (
-            <MarkTag key={mark} timber="cushion" mark={mark} />
-          ))}
-          <span className="flex-1">{HAND_WORDS[group.hand]}</span>
-          <span className="font-normal text-ink-2">make {marks.length}</span>
-        </h3>
-        <p className="mt-3 text-2xl font-light tracking-hero">
-          <Sizes size={spec.finishedMm} />
-        </p>
-        <p className="mb-2 text-sm text-ink-2">
-          Finished, seam to seam. {Math.round(spec.finishedMm.widthMm)} ×{' '}
-          {Math.round(spec.finishedMm.depthMm)} × {Math.round(spec.finishedMm.thicknessMm)} mm, ±¼″.{' '}
-          {spec.kind === 'seat' ? 'Seat' : 'Back'} of {spec.benchMark}.
-        </p>
+    <section className="ruled @container pt-3 pb-10" aria-label={`Cushions ${marks.join(', ')}`}>
+      <div className="grid gap-x-10 gap-y-4 @min-[54rem]:grid-cols-[17.5rem_minmax(0,1fr)] @min-[54rem]:grid-rows-[auto_1fr]">
+        <div>
+          <h2 className="flex flex-wrap items-center gap-2 font-semibold">
+            {marks.map((mark) => (
+              <MarkTag key={mark} timber="cushion" mark={mark} />
+            ))}
+            <span>{HAND_WORDS[group.hand]}</span>
+            <span className="ml-auto font-normal text-ink-2">make {marks.length}</span>
+          </h2>
+          <p className="mt-3 text-2xl font-light tracking-hero whitespace-nowrap">
+            <Sizes size={spec.finishedMm} />
+          </p>
+          <p className="text-sm text-ink-2">
+            Finished, seam to seam. {Math.round(widthMm)} × {Math.round(depthMm)} × {Math.round(thicknessMm)}{' '}
+            mm, ± <Measure text="¼″" />. {seat ? 'Seat' : 'Back'} of {spec.benchMark}.
+          </p>
+          {mirroredMarks.length > 0 && (
+            <p className="mt-2 text-sm text-ink-2">{mirroredMarks.join(', ')}: the same, mirrored.</p>
+          )}
+        </div>
+        <div className="min-w-0 @min-[54rem]:row-span-2">
+          <p className="mb-2 flex flex-wrap justify-between gap-x-4">
+            <b className="font-semibold">
+              {first} {seat ? 'from above, back edge up' : 'from the front, top edge up'}
+            </b>
+            {group.hand !== 'either' && (
+              <span className="text-ink-2">drawn: {HAND_WORDS[group.hand]} as sat in</span>
+            )}
+          </p>
+          <CushionDrawing
+            drawing={drawing.plan}
+            label={`${marks.join(', ')}, plan with measures`}
+            leastPx={500}
+          />
+          <p className="mt-4 border-t border-rule pt-2 text-sm text-ink-2">From the front</p>
+          <CushionDrawing drawing={drawing.front} label={`${first}, front edge`} leastPx={460} />
+          <p className="mt-4 border-t border-rule pt-2 text-sm text-ink-2">
+            Cut from back to front, front at the right, not loaded
+          </p>
+          <CushionDrawing drawing={drawing.section} label={`${first}, section`} leastPx={300} mostPx={420} />
+        </div>
         <Facts spec={spec} words={words} />
-        {mirroredMarks.length > 0 && (
-          <p className="mt-3 text-sm text-ink-2">{mirroredMarks.join(', ')}: the same, mirrored.</p>
-        )}
-      </div>
-      <div className="min-w-0">
-        <p className="flex flex-wrap justify-between gap-x-4 text-sm">
-          <b className="font-semibold">
-            {marks[0]} {spec.kind === 'seat' ? 'from above, back edge up' : 'from the front, top edge up'}
-          </b>
-          <span className="text-ink-2">drawn: {HAND_WORDS[group.hand]}</span>
-        </p>
-        <div className="overflow-x-auto">
-          <div className="min-w-[34rem]">
-            <CushionDrawing
-              drawing={drawing.plan}
-              label={`${marks.join(', ')}, plan with measures`}
-              widthPx={680}
-            />
-          </div>
-        </div>
-        <div className="grid gap-6 phone:grid-cols-2">
-          <div>
-            <p className="text-sm text-ink-2">From the front</p>
-            <CushionDrawing drawing={drawing.front} label={`${marks[0] ?? ''}, front edge`} widthPx={300} />
-          </div>
-          <div>
-            <p className="text-sm text-ink-2">Cut, front at the right, not loaded</p>
-            <CushionDrawing drawing={drawing.section} label={`${marks[0] ?? ''}, section`} widthPx={300} />
-          </div>
-        </div>
       </div>
     </section>
   );

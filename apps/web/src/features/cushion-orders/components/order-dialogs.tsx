@@ -16,6 +16,7 @@ import {
   type OrderPath,
 } from '../api.ts';
 import { SPEC_WORDS, type Order, type OrderSpec } from '../order.ts';
+import { useKeptText } from '../use-kept-text.ts';
 
 interface DialogOfOrder {
   path: OrderPath;
@@ -161,7 +162,7 @@ export function SendOrderDialog({ path, order, open, onClose }: DialogOfOrder) {
   const book = useAddressBook(path.workshopId);
   const send = useSendOrder(path);
   const [upholstererId, setUpholstererId] = useState<string | null>(order.upholsterer?.id ?? null);
-  const [message, setMessage] = useState('');
+  const [message, setMessage] = useKeptText(`send.${order.id}`);
   const [adding, setAdding] = useState<string | null>(null);
   const [missing, setMissing] = useState<string | undefined>();
   const [problem, setProblem] = useState<string | null>(null);
@@ -185,9 +186,13 @@ export function SendOrderDialog({ path, order, open, onClose }: DialogOfOrder) {
             return;
           }
           setProblem(null);
-          send
-            .mutateAsync({ upholstererId, message })
-            .then(onClose, (error: unknown) => setProblem(sayProblem(error)));
+          send.mutateAsync({ upholstererId, message }).then(
+            () => {
+              setMessage('');
+              onClose();
+            },
+            (error: unknown) => setProblem(sayProblem(error)),
+          );
         }}
       >
         <div className="grid gap-4">

@@ -6,8 +6,8 @@ export function Thread({ messages, own }: { messages: readonly OrderMessage[]; o
   if (messages.length === 0) return <p className="py-3 text-sm text-ink-2">Nothing was written yet.</p>;
   return (
     <ol>
-      {messages.map((message) => (
-        <li key={`${message.at}${message.text}`} className="border-b border-rule py-2.5">
+      {messages.map((message, index) => (
+        <li key={message.id ?? index} className="border-b border-rule py-2.5">
           <p className="flex justify-between gap-4 text-sm">
             <b className="font-semibold">{message.side === own ? 'You' : message.authorName}</b>
             <time dateTime={message.at} className="text-ink-2">

@@ -1,15 +1,13 @@
-import { useEffect, useState, type ReactNode } from 'react';
-import { Button } from '@/components/button.tsx';
+import { useEffect, type ReactNode } from 'react';
 import { LoadingLine } from '@/components/loading.tsx';
-import { Notice } from '@/components/notice.tsx';
 import { RuleHeading } from '@/components/rule-heading.tsx';
-import { TextField } from '@/components/text-field.tsx';
 import { dayWords } from '@/lib/dates.ts';
 import { usePageTitle } from '@/lib/page-title.ts';
-import { sayProblem } from '@/lib/problem.ts';
 import { setProductionUnits } from '@/lib/unit-choice.ts';
-import { useAcknowledge, usePublicOrder, useReply } from '../api.ts';
+import { usePublicOrder, useReply } from '../api.ts';
 import type { PublicOrder } from '../order.ts';
+import { Acknowledge } from './acknowledge.tsx';
+import { ClosedLink } from './closed-link.tsx';
 import { CushionGroups } from './cushion-groups.tsx';
 import { Thread } from './thread.tsx';
 import { WriteBox } from './write-box.tsx';
@@ -23,54 +21,6 @@ function Fact({ name, children }: { name: string; children: ReactNode }) {
   );
 }
 
-function Acknowledge({ token, order }: { token: string; order: PublicOrder }) {
-  const acknowledge = useAcknowledge(token);
-  const [name, setName] = useState('');
-  const [error, setError] = useState<string | undefined>();
-  if (order.acknowledgement) {
-    return (
-      <Notice>
-        {order.acknowledgement.name} acknowledged revision {order.acknowledgement.revisionLetter} on{' '}
-        {dayWords(order.acknowledgement.at)}.
-      </Notice>
-    );
-  }
-  return (
-    <form
-      noValidate
-      className="grid gap-3"
-      onSubmit={(event) => {
-        event.preventDefault();
-        if (name.trim() === '') {
-          setError('No name was typed. Type your name, so that the workshop knows who has it.');
-          return;
-        }
-        acknowledge.mutate(name.trim());
-      }}
-    >
-      {acknowledge.isError && <Notice tone="wont">{sayProblem(acknowledge.error)}</Notice>}
-      <TextField
-        label="Your name, typed"
-        autoComplete="name"
-        maxLength={120}
-        value={name}
-        error={error}
-        onChange={(event) => {
-          setError(undefined);
-          setName(event.target.value);
-        }}
-      />
-      <Button type="submit" look="main" busy={acknowledge.isPending} busyWords="Saying so">
-        I have this order
-      </Button>
-      <p className="text-sm text-ink-2">
-        This says that revision {order.revisionLetter} has reached you, no more. Name, time and revision are
-        kept.
-      </p>
-    </form>
-  );
-}
-
 function Opened({ token, order }: { token: string; order: PublicOrder }) {
   const reply = useReply(token);
   usePageTitle(order.title);
@@ -80,7 +30,7 @@ function Opened({ token, order }: { token: string; order: PublicOrder }) {
   }, [order.units, order.roundTo]);
   const marks = order.cushions.map(({ mark }) => mark);
   return (
-    <div className="mx-auto grid max-w-[72rem] gap-x-16 gap-y-8 px-8 py-6 max-tablet:px-4 desk:grid-cols-[1fr_21rem]">
+    <div className="mx-auto grid max-w-[72rem] gap-x-16 gap-y-8 px-8 py-6 max-tablet:px-4 desk:grid-cols-[minmax(0,1fr)_21rem]">
       <div className="min-w-0">
         <h1 tabIndex={-1} data-page-heading className="text-2xl font-light tracking-hero">
           {order.title}
@@ -117,7 +67,7 @@ function Opened({ token, order }: { token: string; order: PublicOrder }) {
         <RuleHeading>So far</RuleHeading>
         <Thread messages={order.messages} own="upholsterer" />
         <WriteBox
-          keptAs={`link.${order.number}`}
+          keptAs={`link.${order.workshop.name}.${order.number}`}
           label="Ask or answer the workshop"
           verb="Send to the workshop"
           placeholder={`Goes to ${order.workshop.contactName}`}
@@ -125,7 +75,7 @@ function Opened({ token, order }: { token: string; order: PublicOrder }) {
           send={(text) => reply.mutateAsync(text)}
         />
         <div className="mt-8">
-          <RuleHeading>Received?</RuleHeading>
+          <RuleHeading>Can it be made?</RuleHeading>
           <Acknowledge token={token} order={order} />
         </div>
         <p className="mt-6 text-sm text-ink-2">This link works until {dayWords(order.linkExpiresAt)}.</p>
@@ -149,13 +99,8 @@ export function UpholstererPage({ token }: { token: string }) {
             <LoadingLine words="Fetching the order" />
           </div>
         )}
-        {order.isError && (
-          <div className="page">
-            <h1 tabIndex={-1} data-page-heading className="mb-4 text-2xl font-light">
-              This order cannot be shown
-            </h1>
-            <Notice tone="wont">{sayProblem(order.error)}</Notice>
-          </div>
+        {order.isError && !order.data && (
+          <ClosedLink error={order.error} onTryAgain={() => void order.refetch()} />
         )}
         {order.data && <Opened token={token} order={order.data} />}
       </main>

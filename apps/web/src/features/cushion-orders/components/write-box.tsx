@@ -61,7 +61,7 @@ export function WriteBox({ keptAs, label, verb, placeholder, busy, send }: Write
         <Button type="submit" busy={busy} busyWords="Sending">
           {verb}
         </Button>
-        <span className="text-xs text-ink-3">Kept on this device until sent</span>
+        <span className="text-xs text-ink-2">Kept on this device until sent</span>
       </div>
     </form>
   );
