@@ -12,7 +12,8 @@ export function labelLanes(stretches: readonly (readonly [number, number])[], la
   const taken: number[][] = [];
   return stretches.map(([from, to]) => {
     const middle = (from + to) / 2;
-    const fits = to - from >= labelMm;
+    // Stretches cut to the length of a number come out a hair shorter.
+    const fits = to - from >= labelMm - 1e-6;
     for (let lane = fits ? 0 : 1; ; lane += 1) {
       const there = (taken[lane] ??= []);
       if (there.every((other) => Math.abs(other - middle) >= labelMm)) {
