@@ -19,25 +19,20 @@ const DRAWN_WITHIN_MM = 100;
 
 /** Cushions as the sheets show them: those that come out of the same drawing stand together. */
 export function specCushions(specs: readonly CushionSpec[]): SpecCushion[] {
-  const groups = new Map<string, CushionSpec[]>();
-  for (const spec of specs) {
-    const key = likeness(spec);
-    groups.set(key, [...(groups.get(key) ?? []), spec]);
-  }
-  const mirrored = new Map(
-    groupCushions(specs).flatMap(({ marks, mirroredMarks }) => marks.map((mark) => [mark, mirroredMarks])),
-  );
-  return [...groups.values()].map((alike) => specCushion(alike, mirrored));
+  const byMark = new Map(specs.map((spec) => [spec.mark, spec]));
+  return groupCushions(specs).map(({ marks, spec, mirroredMarks }) => {
+    const benches = marks.map((mark) => byMark.get(mark)?.benchMark ?? '');
+    return specCushion(spec, { marks, benches, mirrorMarks: mirroredMarks });
+  });
 }
 
-function specCushion(alike: readonly CushionSpec[], mirrored: ReadonlyMap<string, string[]>): SpecCushion {
-  const [spec] = alike;
-  if (!spec) throw new Error('a group of cushions is empty');
+function specCushion(
+  spec: CushionSpec,
+  alike: Pick<SpecCushion, 'marks' | 'benches' | 'mirrorMarks'>,
+): SpecCushion {
   const { cut, buttons, zipEdge } = spec;
   return {
-    marks: alike.map(({ mark }) => mark),
-    benches: alike.map(({ benchMark }) => benchMark),
-    mirrorMarks: mirrored.get(spec.mark) ?? [],
+    ...alike,
     kind: spec.kind,
     hand: spec.hand,
     finished: spec.finishedMm,
@@ -70,15 +65,6 @@ function specCushion(alike: readonly CushionSpec[], mirrored: ReadonlyMap<string
 }
 
 /** Everything that shows on a sheet, to a tenth of a millimetre. */
-function likeness(spec: CushionSpec): string {
-  const { kind, hand, edges, finishedMm, cut, zipEdge, foam, buttons, boardLinesMm, datum } = spec;
-  const { wallMark: _, ...datumLike } = datum;
-  const shown = { kind, hand, edges, finishedMm, cut, zipEdge, foam, buttons, boardLinesMm, datumLike };
-  return JSON.stringify(shown, (_key, value: unknown) =>
-    typeof value === 'number' ? Math.round(value * 10) / 10 : value,
-  );
-}
-
 function datumLine({ datum, buttons }: CushionSpec): DatumLine {
   return {
     name: datum.meets === 'bench-end' ? 'bench end' : MEETS[datum.meets],

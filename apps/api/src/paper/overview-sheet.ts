@@ -148,7 +148,7 @@ function orderFacts(pack: SpecPack): Fact[] {
   ];
   const tolerance = isMetric(units) ? '6 mm' : '¼″';
   const flammability = words.flammability
-    ? `Required: ${words.flammability}. Recorded here, not certified.`
+    ? `Required: ${words.flammability.replace(/[.\s]+$/, '')}. Recorded here, not certified.`
     : 'No requirement recorded. Nothing here is certified.';
   return [
     { label: 'Totals', value: bold(totals) },

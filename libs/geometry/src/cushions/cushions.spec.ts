@@ -196,6 +196,22 @@ describe('the cushions of a set', () => {
     expect(specs[0]!.datum.toSeamMm).toBeGreaterThan(0);
   });
 
+  it('are alike when they differ in the last digit only, at whatever fraction of an inch', () => {
+    const [first, second] = deriveCushions(built('facing-benches'));
+    for (const sixteenths of [1, 2, 3, 52, 53]) {
+      const line = inch(sixteenths / 16);
+      const a = { ...first!, mark: 'C1', boardLinesMm: [line - 1e-9] };
+      const b = { ...first!, mark: 'C3', boardLinesMm: [line + 1e-9] };
+      expect(groupCushions([a, b]).map(({ marks }) => marks)).toEqual([['C1', 'C3']]);
+    }
+    const nearer = {
+      ...first!,
+      mark: 'C3',
+      datum: { ...first!.datum, toSeamMm: first!.datum.toSeamMm + inch(1 / 8) },
+    };
+    expect(groupCushions([first!, nearer, second!])).toHaveLength(3);
+  });
+
   it('of like benches are made alike', () => {
     const groups = groupCushions(deriveCushions(built('banquette')));
     expect(groups.find(({ spec }) => spec.benchMark.startsWith('L'))?.marks).toHaveLength(4);

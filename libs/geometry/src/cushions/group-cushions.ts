@@ -1,28 +1,32 @@
 import type { CushionGroup, CushionSpec } from './cushion-spec.ts';
 
-const tenth = (mm: number): number => Math.round(mm * 10) / 10;
+/** Lengths are compared on a grid of 1/64 in: fractions of an inch lie on it, so noise of the last digit never parts two. */
+const GRID_MM = 25.4 / 64;
 
-/** All that makes two cushions the same piece of work, columns counted from the sitter's left. */
+type Hand = CushionSpec['hand'];
+
+const OTHER: Record<Hand, Hand> = { left: 'right', right: 'left', either: 'either' };
+
+/** All that a drawing shows of a cushion, or of its mirror image. */
 function likeness(spec: CushionSpec, mirrored: boolean): string {
-  const { widthMm, depthMm, thicknessMm } = spec.finishedMm;
-  const fromLeft = spec.buttons.columns.map(({ fromSeamMm }) =>
-    spec.datum.side === 'left' ? fromSeamMm : widthMm - fromSeamMm,
+  const { kind, hand, edges, finishedMm, cut, zipEdge, foam, buttons, boardLinesMm, datum } = spec;
+  const { wallMark: _, side, ...datumLike } = datum;
+  const shown = {
+    kind,
+    hand: mirrored ? OTHER[hand] : hand,
+    edges: mirrored ? { ...edges, left: edges.right, right: edges.left } : edges,
+    datumSide: mirrored ? OTHER[side] : side,
+    datumLike,
+    finishedMm,
+    cut,
+    zipEdge,
+    foam,
+    buttons,
+    boardLinesMm,
+  };
+  return JSON.stringify(shown, (_key, value: unknown) =>
+    typeof value === 'number' ? Math.round(value / GRID_MM) : value,
   );
-  const columns = fromLeft.map((x) => tenth(mirrored ? widthMm - x : x)).sort((a, b) => a - b);
-  const { grade, densityKgM3, ifd25N, supportFactor } = spec.foam;
-  return JSON.stringify([
-    spec.kind,
-    [widthMm, depthMm, thicknessMm].map(tenth),
-    columns,
-    spec.buttons.rowsMm.map(tenth),
-    [grade, densityKgM3, ifd25N, supportFactor],
-    mirroredHand(spec.hand, mirrored),
-  ]);
-}
-
-function mirroredHand(hand: CushionSpec['hand'], mirrored: boolean): CushionSpec['hand'] {
-  if (!mirrored || hand === 'either') return hand;
-  return hand === 'left' ? 'right' : 'left';
 }
 
 /**
