@@ -42,12 +42,13 @@ export interface Member {
   workshopId: string;
   get: <T>(path: string) => Promise<T>;
   post: <T>(path: string, body: unknown) => Promise<T>;
+  put: <T>(path: string, body: unknown) => Promise<T>;
 }
 
 /** A session of a member of the demonstration workshop without a browser. */
 export async function openMember(email: string): Promise<Member> {
   let token = '';
-  async function request<T>(method: 'GET' | 'POST', path: string, body?: unknown): Promise<T> {
+  async function request<T>(method: 'GET' | 'POST' | 'PUT', path: string, body?: unknown): Promise<T> {
     const response = await fetch(`${environment('PRODUCT_URL')}/api${path}`, {
       method,
       headers: {
@@ -73,5 +74,6 @@ export async function openMember(email: string): Promise<Member> {
     workshopId: session.workshops[0]?.id ?? '',
     get: (path) => request('GET', path),
     post: (path, body) => request('POST', path, body),
+    put: (path, body) => request('PUT', path, body),
   };
 }

@@ -204,11 +204,11 @@ describe('a set from the first account to the upholsterer’s answer', () => {
     expect(await theirs.locator('body').innerText()).toContain('Bottle-green corduroy');
     expect(await theirs.getByRole('link').allTextContents()).toEqual(['Drawing pack, PDF']);
 
-    await theirs.getByRole('button', { name: 'I have this order' }).click();
+    await theirs.getByRole('button', { name: 'I can make this as drawn' }).click();
     await theirs.getByText('No name was typed.').waitFor();
     await theirs.getByLabel('Your name, typed').fill('Wim Osterley');
-    await theirs.getByRole('button', { name: 'I have this order' }).click();
-    await theirs.getByText('Wim Osterley acknowledged revision A').waitFor();
+    await theirs.getByRole('button', { name: 'I can make this as drawn' }).click();
+    await theirs.getByText('Wim Osterley can make revision A as drawn').waitFor();
     await theirs.getByLabel('Ask or answer the workshop').fill('In stock. May the welt be a shade darker?');
     await theirs.getByRole('button', { name: 'Send to the workshop' }).click();
     await theirs.getByRole('listitem').filter({ hasText: 'a shade darker' }).waitFor();
@@ -224,8 +224,9 @@ describe('a set from the first account to the upholsterer’s answer', () => {
   });
 
   it('shows the workshop the acknowledgement and the answer', async () => {
+    await mailTo(email, /can make it as drawn/);
     await page.goto(orderAddress);
-    await page.getByText('Wim Osterley acknowledged revision A').waitFor();
+    await page.getByText('Wim Osterley can make revision A as drawn').waitFor();
     await page.getByRole('listitem').filter({ hasText: 'a shade darker' }).waitFor();
     expect((await mailTo(email, /wrote/)).text).toContain('May the welt be a shade darker?');
     expect(complaints).toEqual([]);

@@ -46,6 +46,11 @@ export function ImportDialog({ place, open, onClose }: ImportDialogProps) {
     }
     setFileProblem(undefined);
     const text = await readTextFile(file);
+    if (text.trim() === '') {
+      preview.reset();
+      setFileProblem(`“${file.name}” is empty. Choose one with a line of names and a line for each person.`);
+      return;
+    }
     setCsv(text);
     preview.mutate(text);
   };
@@ -125,6 +130,7 @@ interface ReadingProps {
 
 function Reading({ read, good, busy, problem, onBack, onAdd }: ReadingProps) {
   const bad = read.rows.length - good;
+  const left = bad > 0 ? `; ${bad} cannot, and ${bad === 1 ? 'is' : 'are'} left out` : '';
   return (
     <div>
       {problem && (
@@ -133,8 +139,9 @@ function Reading({ read, good, busy, problem, onBack, onAdd }: ReadingProps) {
         </Notice>
       )}
       <p role="status" className="mb-3 text-lg">
-        {good} of {read.rows.length} {read.rows.length === 1 ? 'row' : 'rows'} can be taken
-        {bad > 0 && `; ${bad} cannot, and ${bad === 1 ? 'is' : 'are'} left out`}.
+        {read.rows.length === 0
+          ? 'The table names its columns and has no row under them. Write one row for each person.'
+          : `${good} of ${read.rows.length} ${read.rows.length === 1 ? 'row' : 'rows'} can be taken${left}.`}
       </p>
       {read.ignoredColumns.length > 0 && (
         <p className="mb-3 text-sm text-ink-2">
