@@ -5,7 +5,8 @@ import { announce } from '@/lib/announce.ts';
 import { sayProblem } from '@/lib/problem.ts';
 import { useWorkshop } from '@/lib/workshop.ts';
 import { useApprove, type FullRevision, type SetPath } from '../api.ts';
-import { sayApproval, sayWhen } from './revision-words.ts';
+import { momentWords } from '@/lib/dates.ts';
+import { sayApproval } from './revision-words.ts';
 
 /** What reviewers said of a revision, and the form with which one more says it. */
 export function ApprovalForm({ path, revision }: { path: SetPath; revision: FullRevision }) {
@@ -41,7 +42,8 @@ export function ApprovalForm({ path, revision }: { path: SetPath; revision: Full
         {revision.approvals.length === 0 && <li className="text-ink-3">{sayApproval(undefined)}</li>}
         {revision.approvals.map((approval) => (
           <li key={approval.decidedAt}>
-            <strong className="font-medium">{sayApproval(approval)}</strong>, {sayWhen(approval.decidedAt)}
+            <strong className="font-medium">{sayApproval(approval)}</strong>,{' '}
+            {momentWords(approval.decidedAt)}
             {approval.comment && <span className="block max-w-text text-ink-2">{approval.comment}</span>}
           </li>
         ))}

@@ -7,15 +7,13 @@ import { Notice } from '@/components/notice.tsx';
 import { sayProblem } from '@/lib/problem.ts';
 import { copyAsSet } from '../api.ts';
 import { useAutosave, useSurroundings } from '../room-context.tsx';
+import { timeWords } from '@/lib/dates.ts';
 import type { DraftConflict } from '../save/autosave.ts';
 import { shortName } from '../sitters.ts';
 import { useRoom } from '../store.ts';
 import { changedVerdicts } from '../verdict-words.ts';
 import { ConflictChoice } from './conflict-choice.tsx';
 import { nameOf, sayValue, type Side, type WordsOf } from './conflict-words.ts';
-
-const clock = (iso: string): string =>
-  new Date(iso).toLocaleTimeString(undefined, { hour: 'numeric', minute: '2-digit' });
 
 /** Two people edited: what only one changed is kept, what both changed is chosen, nothing by itself. */
 export function ConflictScreen({ conflict }: { conflict: DraftConflict }) {
@@ -59,8 +57,8 @@ export function ConflictScreen({ conflict }: { conflict: DraftConflict }) {
         {setName} changed while you were working.
       </h1>
       <p className="mt-2 max-w-text text-lg text-ink-2">
-        {current.savedBy.name || 'Somebody'} saved draft {current.number} at {clock(current.savedAt)}, after
-        you opened draft {began.number}. Nothing is lost: both versions are kept.{' '}
+        {current.savedBy.name || 'Somebody'} saved draft {current.number} at {timeWords(current.savedAt)},
+        after you opened draft {began.number}. Nothing is lost: both versions are kept.{' '}
         {open.length === 0
           ? 'No number differs on both sides.'
           : open.length === 1
@@ -76,7 +74,7 @@ export function ConflictScreen({ conflict }: { conflict: DraftConflict }) {
         </span>
         <span>
           <strong className="block text-lg font-semibold text-ink">{who}’s</strong>saved at{' '}
-          {clock(current.savedAt)}
+          {timeWords(current.savedAt)}
         </span>
       </div>
       {open.map((difference) => (

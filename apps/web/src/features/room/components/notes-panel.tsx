@@ -1,5 +1,6 @@
 import type { Part, Piece } from '@settlewright/geometry';
 import { useEffect, useMemo, useState } from 'react';
+import { dayWords } from '@/lib/dates.ts';
 import { Button } from '@/components/button.tsx';
 import { Disclosure } from '@/components/disclosure.tsx';
 import { RuleHeading } from '@/components/rule-heading.tsx';
@@ -54,7 +55,7 @@ export function NotesPanel({ piece, pieces, parts }: Props) {
 function NoteRow({ note, mark }: { note: Note; mark: string | undefined }) {
   const { path } = useSurroundings();
   const resolve = useResolveNote(path);
-  const on = new Date(note.createdAt).toLocaleDateString(undefined, { day: 'numeric', month: 'short' });
+  const on = dayWords(note.createdAt);
   return (
     <li className="border-b border-rule pb-2 text-sm">
       <p>

@@ -18,7 +18,7 @@ import { createRoomStore, RoomStoreContext } from '../store.ts';
 import { ApprovalForm } from './approval-form.tsx';
 import { KeyPlan } from './key-plan.tsx';
 import { PiecesPanel } from './pieces-panel.tsx';
-import { sayWhen } from './revision-words.ts';
+import { momentWords } from '@/lib/dates.ts';
 import { SceneStage } from './scene-stage.tsx';
 import { SpecSentence } from './spec-sentence.tsx';
 
@@ -59,7 +59,9 @@ function Frozen({ path, setName, revision }: { path: SetPath; setName: string; r
   );
   return (
     <article aria-label={`Revision ${revision.letter}`} className="min-w-0">
-      <RuleHeading aside={<span className="text-sm text-ink-3">issued {sayWhen(revision.issuedAt)}</span>}>
+      <RuleHeading
+        aside={<span className="text-sm text-ink-3">issued {momentWords(revision.issuedAt)}</span>}
+      >
         Revision {revision.letter}
       </RuleHeading>
       {revision.note && <p className="max-w-text whitespace-pre-line text-ink-2">{revision.note}</p>}

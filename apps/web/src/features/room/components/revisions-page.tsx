@@ -10,7 +10,8 @@ import { sayProblem } from '@/lib/problem.ts';
 import { useTitleCells, type TitleCell } from '@/lib/title-cells.ts';
 import { useRevisions, useSetInfo, type Revision, type SetPath } from '../api.ts';
 import { RevisionView } from './revision-view.tsx';
-import { sayApproval, sayWhen } from './revision-words.ts';
+import { momentWords } from '@/lib/dates.ts';
+import { sayApproval } from './revision-words.ts';
 
 /** All issued revisions of a set; the chosen one is shown as it was frozen. */
 export function RevisionsPage({ path }: { path: SetPath }) {
@@ -86,7 +87,7 @@ function RevisionRow({ revision, chosen, onChoose }: RowProps) {
           {revision.letter}
         </span>
         <span className="min-w-0 flex-1 text-sm">
-          <span className="block font-medium">{sayWhen(revision.issuedAt)}</span>
+          <span className="block font-medium">{momentWords(revision.issuedAt)}</span>
           <span className="block text-ink-2">
             {revision.issuedBy.name}, from draft {revision.number}
           </span>

@@ -3,6 +3,7 @@ import { useCallback, useEffect, useLayoutEffect, useRef } from 'react';
 import { classNames } from '@/components/class-names.ts';
 import { Measure } from '@/components/measure.tsx';
 import type { SeatedBody } from '../picture.ts';
+import { useSurroundings } from '../room-context.tsx';
 import { shortName } from '../sitters.ts';
 import type { ViewController } from '../scene/view-controller.ts';
 import { mix } from '../scene/vectors.ts';
@@ -35,6 +36,8 @@ const LINE_TONES = {
 /** Names and tapes over the picture, in screen pixels. React makes them; the view moves them. */
 export function Overlay(props: Props) {
   const { controller, namesAtHeads, bodies, tapes, style, litCellId, onSelectPiece } = props;
+  // Whoever sees verdicts alone reads no heights either, though the body is drawn.
+  const { detail } = useSurroundings();
   const layer = useRef<HTMLDivElement>(null);
   const someLit = tapes.some((tape) => tape.cellId !== undefined && tape.cellId === litCellId);
 
@@ -147,7 +150,7 @@ export function Overlay(props: Props) {
           )}
         >
           <strong className="font-semibold">{shortName(body.name)}</strong>
-          {!namesAtHeads && (
+          {!namesAtHeads && detail === 'full' && (
             <span className="text-ink-2 max-phone:hidden">
               {' '}
               <Measure text={formatLength(body.statureMm, { ...style, feet: true })} />
