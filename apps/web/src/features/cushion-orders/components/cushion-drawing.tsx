@@ -135,10 +135,22 @@ export function CushionDrawing({ drawing, label, leastPx, mostPx = Infinity }: C
     const numberText = (shape: DimensionShape) =>
       [format.length(shape.valueMm), shape.label].filter(Boolean).join(' ');
     const fitted = fitDrawing(drawing, Math.min(mostPx, Math.max(leastPx, widthPx)), numberText);
-    return { ...fitted, numberText, moves: spreadWords(drawing.shapes, fitted.at) };
+    const moves = spreadWords(drawing.shapes, fitted.at);
+    const lowered = Math.max(0, ...[...moves.values()].map(({ down }) => down));
+    const box = { ...fitted.box, height: fitted.box.height + lowered };
+    return { at: fitted.at, box, numberText, moves };
   }, [drawing, format, widthPx, leastPx, mostPx]);
   return (
-    <div ref={measure} className="overflow-x-auto">
+    // What has to be scrolled can be reached and scrolled with the keys.
+    <div
+      ref={measure}
+      className="overflow-x-auto"
+      {...(box.width > widthPx + 1 && {
+        tabIndex: 0,
+        role: 'group',
+        'aria-label': `${label}, scrolls sideways`,
+      })}
+    >
       <svg
         viewBox={`${box.x} ${box.y} ${box.width} ${box.height}`}
         width={box.width}

@@ -78,7 +78,7 @@ function Facts({ spec, words }: { spec: CushionSpec; words: OrderSpec }) {
 }
 
 /** Length that a number takes on the plan, for a plan about as wide as the column. */
-const NUMBER_OF_WIDTH = 0.09;
+const NUMBER_OF_WIDTH = 0.1;
 
 function Group({ group, words }: { group: CushionGroup; words: OrderSpec }) {
   const { spec, marks, mirroredMarks } = group;
@@ -126,7 +126,7 @@ function Group({ group, words }: { group: CushionGroup; words: OrderSpec }) {
             leastPx={500}
           />
           <p className="mt-4 border-t border-rule pt-2 text-sm text-ink-2">From the front</p>
-          <CushionDrawing drawing={drawing.front} label={`${first}, front edge`} leastPx={460} />
+          <CushionDrawing drawing={drawing.front} label={`${first}, front edge`} leastPx={340} />
           <p className="mt-4 border-t border-rule pt-2 text-sm text-ink-2">
             Cut from back to front, front at the right, not loaded
           </p>

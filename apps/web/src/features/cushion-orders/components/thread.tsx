@@ -5,7 +5,7 @@ import type { OrderMessage } from '../order.ts';
 export function Thread({ messages, own }: { messages: readonly OrderMessage[]; own: OrderMessage['side'] }) {
   if (messages.length === 0) return <p className="py-3 text-sm text-ink-2">Nothing was written yet.</p>;
   return (
-    <ol>
+    <ol aria-label="Messages">
       {messages.map((message, index) => (
         <li key={message.id ?? index} className="border-b border-rule py-2.5">
           <p className="flex justify-between gap-4 text-sm">

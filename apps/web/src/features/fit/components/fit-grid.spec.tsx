@@ -162,7 +162,9 @@ it('washes the ground of a cell whose verdict a change has turned, for two secon
   if (!lower.ok) throw new Error('The seat cannot be lowered.');
   change({ sheet: check(lower.value) });
   expect(hetty()).toHaveAttribute('data-turned');
-  act(() => vi.advanceTimersByTime(2000));
+  act(() => {
+    vi.advanceTimersByTime(2000);
+  });
   expect(hetty()).not.toHaveAttribute('data-turned');
   vi.useRealTimers();
 });

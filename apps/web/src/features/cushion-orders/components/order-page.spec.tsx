@@ -1,0 +1,109 @@
+import { screen, waitFor, within } from '@testing-library/react';
+import userEvent from '@testing-library/user-event';
+import { http, HttpResponse } from 'msw';
+import { beforeEach, describe, expect, it } from 'vitest';
+import { PRODUCTION_ID, renderPage, signInAs, WORKSHOP_ID } from '@/test/render-page.tsx';
+import { server } from '@/test/server.ts';
+import type { Order } from '../order.ts';
+import { ORDER, SENT_ORDER } from '../test/orders.ts';
+import { OrderPage } from './order-page.tsx';
+
+const AT = '*/api/workshops/:workshopId/productions/:productionId/orders/:orderId';
+const BOOK = '*/api/workshops/:workshopId/upholsterers';
+const page = (items: unknown[]) => ({ items, total: items.length, page: 1, pageSize: 200 });
+const FENNIMORE = { id: 'u9', name: 'Fennimore & Daughter', email: 'odile@fennimore.example' };
+
+function show(order: Order) {
+  server.use(
+    http.get(AT, () => HttpResponse.json(order)),
+    http.get(`${AT}/messages`, () => HttpResponse.json(page([]))),
+    http.get(BOOK, () => HttpResponse.json(page([FENNIMORE]))),
+  );
+  const path = { workshopId: WORKSHOP_ID, productionId: PRODUCTION_ID, orderId: order.id };
+  return renderPage(<OrderPage path={path} />, {
+    path: '/w/:workshopId/p/:productionId/orders/:orderId',
+    at: `/w/${WORKSHOP_ID}/p/${PRODUCTION_ID}/orders/${order.id}`,
+  });
+}
+
+describe('OrderPage', () => {
+  beforeEach(() => signInAs('owner'));
+
+  it('does not send an order to nobody', async () => {
+    const user = userEvent.setup();
+    const sent: unknown[] = [];
+    server.use(
+      http.post(`${AT}/send`, async ({ request }) => {
+        sent.push(await request.json());
+        return HttpResponse.json(SENT_ORDER);
+      }),
+    );
+    show(ORDER);
+    await user.click(await screen.findByRole('button', { name: 'Send the order' }));
+    const dialog = within(await screen.findByRole('dialog', { name: 'Send the order' }));
+    await user.type(dialog.getByLabelText(/^Message/), 'Cloth leaves us on the 10th.');
+    await user.click(dialog.getByRole('button', { name: 'Send the order' }));
+    expect(dialog.getByText(/^Nobody was chosen/)).toBeVisible();
+    expect(dialog.getByRole('combobox', { name: 'To' })).toBeInvalid();
+    expect(sent).toEqual([]);
+    await user.click(dialog.getByRole('combobox', { name: 'To' }));
+    await user.click(await screen.findByRole('option', { name: /Fennimore/ }));
+    await user.click(dialog.getByRole('button', { name: 'Send the order' }));
+    await waitFor(() =>
+      expect(sent).toEqual([{ upholstererId: 'u9', message: 'Cloth leaves us on the 10th.' }]),
+    );
+  });
+
+  it('puts what the server refuses beside its field and keeps what was typed', async () => {
+    const user = userEvent.setup();
+    server.use(
+      http.patch(AT, () =>
+        HttpResponse.json(
+          {
+            code: 'validation',
+            title: 'Not taken',
+            detail: '',
+            fields: [
+              { path: 'spec.welt', code: 'too-long', message: 'The welt may have 200 letters.' },
+              { path: 'cushionMarks', code: 'unknown', message: 'There is no cushion C9 in revision B.' },
+            ],
+          },
+          { status: 400 },
+        ),
+      ),
+    );
+    show(ORDER);
+    await user.click(await screen.findByRole('button', { name: 'Change the order' }));
+    const dialog = within(await screen.findByRole('dialog', { name: 'Change the order' }));
+    await user.type(dialog.getByLabelText('Cushions'), 'C9');
+    await user.click(dialog.getByRole('button', { name: 'Change the order' }));
+    await waitFor(() =>
+      expect(dialog.getByLabelText('Cushions')).toHaveAccessibleDescription(/no cushion C9 in revision B/),
+    );
+    expect(dialog.getByLabelText('Welt')).toHaveAccessibleDescription('The welt may have 200 letters.');
+    expect(dialog.getByLabelText('Cushions')).toHaveValue('C9');
+  });
+
+  it('offers to send a mail again that did not go out', async () => {
+    const user = userEvent.setup();
+    let again = 0;
+    server.use(
+      http.post(`${AT}/mail/send-again`, () => {
+        again += 1;
+        return HttpResponse.json(SENT_ORDER);
+      }),
+    );
+    show(SENT_ORDER);
+    expect(await screen.findByText('The mail could not be sent.')).toBeVisible();
+    await user.click(screen.getByRole('button', { name: 'Send the mail again' }));
+    await waitFor(() => expect(again).toBe(1));
+  });
+
+  it('shows a reviewer the order and nothing to change', async () => {
+    signInAs('reviewer');
+    show({ ...SENT_ORDER, lastMail: null });
+    expect(await screen.findByRole('heading', { name: 'Dining car, seat cushions' })).toBeVisible();
+    expect(screen.queryByRole('button', { name: /Send|Change|Cancel|Record|Revoke/ })).toBeNull();
+    expect(screen.queryByRole('textbox')).toBeNull();
+  });
+});
