@@ -58,7 +58,8 @@ function rowTapes(
   return row.cells.flatMap((cell): TapeLine[] => {
     if (cell.outcome.kind !== 'verdict') return [];
     const gap = GAP_OF_RULE[cell.ruleId]?.(view, cell, cell.outcome);
-    if (!gap) return [];
+    // A sheet of verdicts alone holds no value to write on the tape.
+    if (!gap || !Number.isFinite(gap.valueMm)) return [];
     return [gapTape(cell, gap, cell.pieceIds[0] ?? frame.pieceId)];
   });
 }

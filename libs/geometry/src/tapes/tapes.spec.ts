@@ -150,6 +150,19 @@ describe('gaps', () => {
     expect(names).not.toContain('under heel');
   });
 
+  it('leave out what a sheet of verdicts alone does not say', () => {
+    const document = built('facing-benches');
+    const { sheet, bodies, tapes } = seated(document);
+    const silent = structuredClone(sheet);
+    for (const { outcome } of [...silent.rows.flatMap(({ cells }) => cells), ...silent.piecesAndWays]) {
+      if (outcome.kind === 'verdict') delete (outcome as { value?: number }).value;
+    }
+    const shown = gaps(tapeLines(document, silent, undefined, bodies));
+    expect(shown.length).toBeGreaterThan(0);
+    expect(shown.length).toBeLessThan(gaps(tapes).length);
+    for (const { id, valueMm } of shown) expect(valueMm, id).toSatisfy(Number.isFinite);
+  });
+
   it('between facing benches run from seat front to seat front', () => {
     const facing = built('facing-benches');
     const tape = seated(facing).tapes.find(({ name }) => name === 'seat to seat')!;

@@ -39,20 +39,23 @@ export function RoomDesk({ lastRevision, foot, aboutPiece }: Props) {
   const actions = usePieceActions(address.select);
   const { undoStep, redoStep } = useUndo();
   const [helpOpen, setHelpOpen] = useState(false);
-  useRoomCells(lastRevision);
+  const { clientView } = address;
+  // Shown to a client, the room can be looked at and not changed.
+  const mayChange = canEdit && !clientView;
+  useRoomCells(lastRevision, mayChange);
   useSavedCell(autosave);
 
   const keys = useMemo<ShortcutActions>(
     () => ({
-      undo: undoStep,
-      redo: redoStep,
+      undo: () => mayChange && undoStep(),
+      redo: () => mayChange && redoStep(),
       toggleFit: () => address.openFit(!address.fitOpen),
       show: address.show,
       help: () => setHelpOpen(true),
     }),
     // The undo steps act on the store, whatever render made them.
     // eslint-disable-next-line react-hooks/exhaustive-deps
-    [address],
+    [address, mayChange],
   );
   useShortcuts(keys);
 
@@ -66,8 +69,6 @@ export function RoomDesk({ lastRevision, foot, aboutPiece }: Props) {
     address.openFit(true);
   };
   const empty = document.pieces.length === 0;
-  const { clientView } = address;
-  // Shown to a client, the room can be looked at and not changed.
   const shown = clientView ? { ...surroundings, canEdit: false } : surroundings;
 
   return (
@@ -120,9 +121,7 @@ export function RoomDesk({ lastRevision, foot, aboutPiece }: Props) {
             />
             {!empty && <KeyPlan picture={picture} address={address} />}
             <KnownDifferences document={document} onReplace={actions.replace} />
-            {canEdit && !empty && !clientView && (
-              <IssueRevision sheet={picture.sheet} lastLetter={lastRevision} />
-            )}
+            {mayChange && !empty && <IssueRevision sheet={picture.sheet} lastLetter={lastRevision} />}
             {!clientView && <NotesPanel piece={piece} pieces={document.pieces} parts={picture.parts} />}
             <p>
               <Button look="word" onClick={() => setHelpOpen(true)}>

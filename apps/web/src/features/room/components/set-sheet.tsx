@@ -3,7 +3,7 @@ import { useStore } from 'zustand';
 import { useSetInfo, type SetPath } from '../api.ts';
 import { useRoomCells } from '../hooks/use-room-cells.ts';
 import { useSavedCell } from '../hooks/use-saved-cell.ts';
-import { useAutosave } from '../room-context.tsx';
+import { useAutosave, useSurroundings } from '../room-context.tsx';
 import { ConflictScreen } from './conflict-screen.tsx';
 import { OpenRoom } from './open-room.tsx';
 
@@ -16,7 +16,8 @@ function Frame({ path, children }: Props) {
   const info = useSetInfo(path);
   const autosave = useAutosave();
   const { save } = useStore(autosave.state);
-  useRoomCells(info.data?.lastRevision?.letter);
+  const { canEdit } = useSurroundings();
+  useRoomCells(info.data?.lastRevision?.letter, canEdit);
   useSavedCell(autosave);
   return save.kind === 'conflict' ? <ConflictScreen conflict={save.conflict} /> : children;
 }

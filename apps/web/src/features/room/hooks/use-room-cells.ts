@@ -5,8 +5,8 @@ import { useAutosave, useSurroundings } from '../room-context.tsx';
 import { useUndo } from '../store.ts';
 
 /** The room's cells of the title block: set, draft, undo and redo by name. */
-export function useRoomCells(lastRevision: string | undefined): void {
-  const { path, setName, canEdit } = useSurroundings();
+export function useRoomCells(lastRevision: string | undefined, canEdit: boolean): void {
+  const { path, setName } = useSurroundings();
   const autosave = useAutosave();
   const number = useStore(autosave.state, (state) => state.base.number);
   const { undo, redo, undoStep, redoStep } = useUndo();
