@@ -5,7 +5,7 @@ import type { RuleScope, RuleUnit, SourceMark } from './fit-sheet.ts';
 /** What the screen says for each way a source was read. */
 export const SOURCE_MARK_WORDS: Record<SourceMark, string> = {
   RETRIEVED: 'read in the source',
-  'FROM MEMORY': 'from memory, not read again',
+  'FROM MEMORY': 'from memory',
   DERIVED: 'worked out here',
   'HOUSE RULE': 'shop rule',
 };
