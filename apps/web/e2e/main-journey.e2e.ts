@@ -175,7 +175,7 @@ describe('a set from the first account to the upholsterer’s answer', () => {
     await sending.getByRole('combobox', { name: 'To' }).fill(UPHOLSTERER.name);
     await page.getByRole('option', { name: /^Add / }).click();
     const adding = page.getByRole('dialog', { name: 'Add an upholsterer' });
-    expect(await adding.getByLabel('Workshop').inputValue()).toBe(UPHOLSTERER.name);
+    expect(await adding.getByLabel('Business').inputValue()).toBe(UPHOLSTERER.name);
     await adding.getByLabel('Contact').fill('Wim Osterley');
     await adding.getByLabel('E-mail').fill(UPHOLSTERER.email);
     await adding.getByRole('button', { name: 'Add to the address book' }).click();
