@@ -8,7 +8,8 @@ export interface FieldWords {
   description?: ReactNode;
   /** What was wrong, in words; takes the place of nothing and stands under the field. */
   error?: string;
-  optional?: boolean;
+  /** Said behind the label: "(optional)", or "(if known)" for what somebody has to have measured. */
+  optional?: boolean | 'if known';
   className?: string;
 }
 
@@ -40,7 +41,9 @@ export function FieldFrame({
     <div className={classNames('min-w-0', className)}>
       <label htmlFor={id} className="mb-1 block text-sm font-medium">
         {label}
-        {optional && <span className="font-normal text-ink-3"> (if known)</span>}
+        {optional && (
+          <span className="font-normal text-ink-3"> ({optional === true ? 'optional' : optional})</span>
+        )}
       </label>
       {children({
         id,

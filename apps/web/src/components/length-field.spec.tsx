@@ -13,6 +13,7 @@ function Harness({ mm }: { mm: number | null }) {
   return (
     <LengthField
       label="Height"
+      optional
       feet
       minMm={1000}
       maxMm={2300}
@@ -26,7 +27,7 @@ function Harness({ mm }: { mm: number | null }) {
   );
 }
 
-const field = () => screen.getByLabelText('Height');
+const field = () => screen.getByLabelText('Height (if known)');
 
 describe('LengthField', () => {
   beforeEach(() => {

@@ -42,6 +42,7 @@ export function QuantityField({
   ref,
   error,
   description,
+  optional,
   ...words
 }: QuantityFieldProps) {
   const [typed, setTyped] = useState<string | null>(null);
@@ -72,6 +73,7 @@ export function QuantityField({
   return (
     <FieldFrame
       {...words}
+      optional={optional && 'if known'}
       error={error}
       description={
         <>
