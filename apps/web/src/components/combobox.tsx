@@ -5,7 +5,7 @@ import {
   ComboboxOption,
   ComboboxOptions,
 } from '@headlessui/react';
-import { useState } from 'react';
+import { useState, type ComponentPropsWithRef } from 'react';
 import { classNames } from './class-names.ts';
 import { FIELD_LINE, FieldFrame, type FieldWords } from './field-frame.tsx';
 import { AddIcon, OpenIcon } from './icons.tsx';
@@ -28,6 +28,14 @@ interface ComboboxProps extends FieldWords {
 }
 
 const ADD: ComboboxChoice = { id: '\u0000add', words: '' };
+
+/** The library takes `aria-describedby` for itself, so the field's own comes by another name. */
+function DescribedInput({
+  describedBy,
+  ...input
+}: ComponentPropsWithRef<'input'> & { describedBy?: string }) {
+  return <input {...input} aria-describedby={describedBy} />;
+}
 
 /** One of many; typing narrows the list. */
 export function Combobox({
@@ -57,7 +65,9 @@ export function Combobox({
         >
           <div className="relative">
             <ComboboxInput
+              as={DescribedInput}
               {...control}
+              describedBy={control['aria-describedby']}
               placeholder={placeholder}
               displayValue={(choice: ComboboxChoice | null) => choice?.words ?? ''}
               onChange={(event) => setTyped(event.target.value)}
