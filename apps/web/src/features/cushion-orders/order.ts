@@ -83,6 +83,15 @@ export interface Order {
   events: OrderEvent[];
 }
 
+/** What an upholsterer asks for first and the order does not say, in words. */
+export function notSaidYet({ spec, neededBy }: Pick<Order, 'spec' | 'neededBy'>): string[] {
+  return [
+    spec.cover.trim() === '' && 'cover',
+    spec.welt.trim() === '' && 'welt',
+    neededBy === null && 'needed-by date',
+  ].filter((words) => words !== false);
+}
+
 /** What the holder of a private link sees. */
 export interface PublicOrder {
   workshop: { name: string; telephone: string; contactName: string };

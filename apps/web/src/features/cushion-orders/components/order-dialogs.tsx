@@ -2,6 +2,7 @@ import { useState } from 'react';
 import { useForm } from 'react-hook-form';
 import { Combobox } from '@/components/combobox.tsx';
 import { FormDialog } from '@/components/dialog.tsx';
+import { Notice } from '@/components/notice.tsx';
 import { orderStateWords } from '@/components/tape-order.tsx';
 import { TextArea, TextField } from '@/components/text-field.tsx';
 import type { OrderState } from '@/lib/contract.ts';
@@ -15,7 +16,7 @@ import {
   useSendOrder,
   type OrderPath,
 } from '../api.ts';
-import { SPEC_WORDS, type Order, type OrderSpec } from '../order.ts';
+import { notSaidYet, SPEC_WORDS, type Order, type OrderSpec } from '../order.ts';
 import { useKeptText } from '../use-kept-text.ts';
 
 interface DialogOfOrder {
@@ -108,21 +109,30 @@ export function ChangeOrderDialog({ path, order, open, onClose }: DialogOfOrder)
   );
 }
 
-/** Somebody new for the address book, without leaving the order. */
+/** Somebody new for the address book, without leaving the order; what was typed may be a name or an address. */
 function NewUpholsterer({
   workshopId,
-  name,
+  typed,
   onAdded,
   onClose,
 }: {
   workshopId: string;
-  name: string;
+  typed: string;
   onAdded: (id: string) => void;
   onClose: () => void;
 }) {
   const add = useAddUpholsterer(workshopId);
   const [problem, setProblem] = useState<string | null>(null);
-  const form = useForm({ values: { name, contactName: '', email: '', telephone: '', notes: '' } });
+  const isAddress = typed.includes('@');
+  const form = useForm({
+    defaultValues: {
+      name: isAddress ? '' : typed,
+      contactName: '',
+      email: isAddress ? typed : '',
+      telephone: '',
+      notes: '',
+    },
+  });
   const { errors } = form.formState;
   const submit = form.handleSubmit(async (input) => {
     setProblem(null);
@@ -143,7 +153,7 @@ function NewUpholsterer({
       onSubmit={(event) => void submit(event)}
     >
       <div className="grid gap-4">
-        <TextField label="Workshop" error={errors.name?.message} {...form.register('name')} />
+        <TextField label="Business" error={errors.name?.message} {...form.register('name')} />
         <TextField label="Contact" error={errors.contactName?.message} {...form.register('contactName')} />
         <TextField label="E-mail" type="email" error={errors.email?.message} {...form.register('email')} />
         <TextField
@@ -168,6 +178,7 @@ export function SendOrderDialog({ path, order, open, onClose }: DialogOfOrder) {
   const [problem, setProblem] = useState<string | null>(null);
   const choices = (book.data?.items ?? []).map(({ id, name, email }) => ({ id, words: name, detail: email }));
   const marks = order.cushions.map(({ mark }) => mark);
+  const notSaid = notSaidYet(order);
   return (
     <>
       <FormDialog
@@ -196,6 +207,12 @@ export function SendOrderDialog({ path, order, open, onClose }: DialogOfOrder) {
         }}
       >
         <div className="grid gap-4">
+          {notSaid.length > 0 && (
+            <Notice>
+              Not said yet: {notSaid.join(', ')}. The upholsterer’s first question will be about{' '}
+              {notSaid.length === 1 ? 'it' : 'them'}.
+            </Notice>
+          )}
           <Combobox
             label="To"
             value={upholstererId}
@@ -221,7 +238,7 @@ export function SendOrderDialog({ path, order, open, onClose }: DialogOfOrder) {
       {adding !== null && (
         <NewUpholsterer
           workshopId={path.workshopId}
-          name={adding}
+          typed={adding}
           onAdded={(id) => {
             setUpholstererId(id);
             setMissing(undefined);

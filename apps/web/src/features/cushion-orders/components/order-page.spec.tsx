@@ -45,6 +45,7 @@ describe('OrderPage', () => {
     await user.click(dialog.getByRole('button', { name: 'Send the order' }));
     expect(dialog.getByText(/^Nobody was chosen/)).toBeVisible();
     expect(dialog.getByRole('combobox', { name: 'To' })).toBeInvalid();
+    expect(dialog.getByRole('combobox', { name: 'To' })).toHaveAccessibleDescription(/^Nobody was chosen/);
     expect(sent).toEqual([]);
     await user.click(dialog.getByRole('combobox', { name: 'To' }));
     await user.click(await screen.findByRole('option', { name: /Fennimore/ }));
@@ -52,6 +53,35 @@ describe('OrderPage', () => {
     await waitFor(() =>
       expect(sent).toEqual([{ upholstererId: 'u9', message: 'Cloth leaves us on the 10th.' }]),
     );
+  });
+
+  it.each([
+    [ORDER, /^Not said yet: welt, needed-by date\. .* about them\.$/],
+    [{ ...ORDER, neededBy: '2026-02-26' }, /^Not said yet: welt\. .* about it\.$/],
+    [{ ...ORDER, spec: { ...ORDER.spec, welt: 'Self, 10 mm cord' }, neededBy: '2026-02-26' }, undefined],
+  ])('says before sending what the order leaves open', async (order, words) => {
+    const user = userEvent.setup();
+    show(order);
+    await user.click(await screen.findByRole('button', { name: 'Send the order' }));
+    const dialog = within(await screen.findByRole('dialog', { name: 'Send the order' }));
+    if (words === undefined) expect(dialog.queryByText(/^Not said yet/)).toBeNull();
+    else expect(dialog.getByText(words)).toBeVisible();
+    expect(dialog.getByLabelText('Message (optional)')).toBeVisible();
+  });
+
+  it.each([
+    ['odile@fennimore.example', '', 'odile@fennimore.example'],
+    ['Fennimore Upholstery', 'Fennimore Upholstery', ''],
+  ])('puts %s into the field it belongs to', async (typed, business, email) => {
+    const user = userEvent.setup();
+    show(ORDER);
+    await user.click(await screen.findByRole('button', { name: 'Send the order' }));
+    const sending = within(await screen.findByRole('dialog', { name: 'Send the order' }));
+    await user.type(sending.getByRole('combobox', { name: 'To' }), typed);
+    await user.click(await screen.findByRole('option', { name: /^Add “/ }));
+    const adding = within(await screen.findByRole('dialog', { name: 'Add an upholsterer' }));
+    expect(adding.getByLabelText('Business')).toHaveValue(business);
+    expect(adding.getByLabelText('E-mail')).toHaveValue(email);
   });
 
   it('puts what the server refuses beside its field and keeps what was typed', async () => {
