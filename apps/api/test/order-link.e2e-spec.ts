@@ -285,6 +285,59 @@ describe('the private link to an order', () => {
     await answer(token, 'acknowledge', { name: 'Odile' }).expect(200);
   });
 
+  describe('of an order that goes to another upholsterer', () => {
+    /** Sent to a first firm, answered and agreed there, then sent to a second. */
+    const sendOn = async (secondMessage = '') => {
+      const first = await sendOrder('Sent on');
+      await answer(first.token, 'reply', { text: 'We charge a lot.' }).expect(200);
+      await answer(first.token, 'acknowledge', { name: 'Odile Fennimore' }).expect(200);
+      const email = `second-${first.email}`;
+      const firm = await as(test, owner)
+        .post(`/workshops/${made.workshop.id}/upholsterers`)
+        .send({ name: 'Marrow & Tuft', contactName: 'Ines Marrow', email })
+        .expect(201);
+      const sent = await as(test, owner)
+        .post(`${first.path}/send`)
+        .send({ upholstererId: (firm.body as { id: string }).id, message: secondMessage })
+        .expect(200);
+      return { ...first, second: email, sent, token: await mailedToken(test, email, 'cushion-order') };
+    };
+
+    it('shows the second nothing of the first', async () => {
+      const { token, sent, path } = await sendOn('A fresh start.');
+      const { body } = await open(token).expect(200);
+      expect((body as { messages: unknown }).messages).toEqual([
+        { side: 'workshop', authorName: owner.name, text: 'A fresh start.', at: expect.any(String) },
+      ]);
+      expect(body).toMatchObject({ upholstererName: 'Marrow & Tuft', acknowledgement: null });
+      const text = JSON.stringify(body);
+      for (const secret of ['Odile', 'Firm ', 'a lot', 'Good morning']) expect(text).not.toContain(secret);
+      expect(sent.body).toMatchObject({ acknowledgement: null });
+      await answer(token, 'acknowledge', { name: 'Ines Marrow' }).expect(200);
+      expect((await as(test, owner).get(path).expect(200)).body).toMatchObject({
+        acknowledgement: { name: 'Ines Marrow' },
+      });
+    });
+
+    it('does not wait for answers to the first', async () => {
+      const { token, sent, path } = await sendOn();
+      expect(sent.body).toMatchObject({ openQuestions: 0 });
+      await answer(token, 'reply', { text: 'Which cloth?' }).expect(200);
+      expect((await as(test, owner).get(path).expect(200)).body).toMatchObject({ openQuestions: 1 });
+    });
+
+    it('keeps the whole thread for the workshop, with whom each word was exchanged', async () => {
+      const { path } = await sendOn('A fresh start.');
+      const { body } = await as(test, owner).get(`${path}/messages`).expect(200);
+      const { items } = body as { items: { text: string; upholstererName: string }[] };
+      expect(items.map(({ text, upholstererName }) => [text, upholstererName])).toEqual([
+        ['Good morning.', expect.stringMatching(/^Firm \d+$/)],
+        ['We charge a lot.', expect.stringMatching(/^Firm \d+$/)],
+        ['A fresh start.', 'Marrow & Tuft'],
+      ]);
+    });
+  });
+
   it('takes no answer to a cancelled order, but still shows it', async () => {
     const { token, path } = await sendOrder();
     await as(test, owner).post(`${path}/cancel`).send({}).expect(200);

@@ -12,7 +12,7 @@ import { OrderEvent } from './entities/order-event.entity';
 import { OrderLink } from './entities/order-link.entity';
 import { OrderMessage } from './entities/order-message.entity';
 import { isLinkToken } from './link-token';
-import { lockOrder } from './order-access';
+import { lockOrder, ofItsUpholsterer } from './order-access';
 import type { SentContent } from './order-content';
 import { acknowledgedMail, replyMail, type UpholstererNews } from './order-mail';
 import { recordEvent } from './order-record';
@@ -90,6 +90,7 @@ export class LinkService {
       await manager.save(
         manager.create(OrderMessage, {
           orderId: order.id,
+          upholstererId: order.upholstererId,
           side: 'upholsterer',
           authorId: null,
           authorName: order.upholsterer?.contactName || order.upholsterer?.name || 'Upholsterer',
@@ -105,6 +106,8 @@ export class LinkService {
     const { order: opened } = await this.open(token, manager);
     const { workshopId, productionId, id: orderId } = opened;
     const order = await lockOrder(manager, { workshopId, productionId, orderId });
+    // Whoever held the order while this waited may have ended the link or sent the order to another.
+    await this.open(token, manager);
     const sent = order.sent ?? opened.sent;
     if (isOver(order.state) || sent === null) {
       throw Problem.conflict(
@@ -146,13 +149,13 @@ export class LinkService {
   }
 }
 
-/** The upholsterer's word on what was last sent, if it was given. */
+/** The word of the upholsterer who has the order on what was last sent, if it was given. */
 export async function acknowledgementOf(
   manager: EntityManager,
   order: CushionOrder,
 ): Promise<OrderEvent | null> {
   const last = await manager.findOne(OrderEvent, {
-    where: { orderId: order.id, kind: In(['sent', 'acknowledged']) },
+    where: { orderId: order.id, ...ofItsUpholsterer(order), kind: In(['sent', 'acknowledged']) },
     order: { at: 'DESC' },
   });
   return last?.kind === 'acknowledged' ? last : null;

@@ -1,4 +1,4 @@
-import type { EntityManager } from 'typeorm';
+import { type EntityManager, IsNull } from 'typeorm';
 import { Problem } from '../common/problem';
 import { CushionOrder } from './entities/cushion-order.entity';
 
@@ -23,4 +23,9 @@ export async function findOrder(manager: EntityManager, place: OrderPlace): Prom
 export async function lockOrder(manager: EntityManager, place: OrderPlace): Promise<CushionOrder> {
   await manager.query('SELECT 1 FROM cushion_orders WHERE id = $1 FOR UPDATE', [place.orderId]);
   return findOrder(manager, place);
+}
+
+/** Picks what was exchanged with the upholsterer who has the order now, and with nobody before. */
+export function ofItsUpholsterer({ upholstererId }: Pick<CushionOrder, 'upholstererId'>) {
+  return { upholstererId: upholstererId ?? IsNull() };
 }

@@ -94,6 +94,7 @@ export class OrderCorrespondence {
     const order = await findOrder(this.dataSource.manager, place);
     const select = this.dataSource.manager
       .createQueryBuilder(OrderMessage, 'message')
+      .leftJoinAndSelect('message.upholsterer', 'upholsterer')
       .where('message.orderId = :orderId', { orderId: order.id });
     return readPage(select, page, {
       sortable: { at: 'message.at' },
@@ -109,6 +110,7 @@ export class OrderCorrespondence {
       const order = await lockOrder(manager, place);
       requireCorrespondent(order);
       const message = await this.keepMessage(manager, order, author, text);
+      message.upholsterer = order.upholsterer;
       await this.post(manager, order, workshopMessageMail(await this.letter(manager, order, author, text)));
       return message;
     });
@@ -190,7 +192,14 @@ export class OrderCorrespondence {
   ): Promise<OrderMessage> {
     const { id: authorId, name: authorName } = author;
     return manager.save(
-      manager.create(OrderMessage, { orderId: order.id, side: 'workshop', authorId, authorName, text }),
+      manager.create(OrderMessage, {
+        orderId: order.id,
+        upholstererId: order.upholstererId,
+        side: 'workshop',
+        authorId,
+        authorName,
+        text,
+      }),
     );
   }
 

@@ -22,6 +22,7 @@ export async function recordEvent(
   return manager.save(
     manager.create(OrderEvent, {
       orderId: order.id,
+      upholstererId: order.upholstererId,
       kind: happened.kind,
       side: happened.side ?? 'workshop',
       byId: happened.byId,

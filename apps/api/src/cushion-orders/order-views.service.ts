@@ -19,6 +19,7 @@ import { OrderEvent } from './entities/order-event.entity';
 import { OrderMessage } from './entities/order-message.entity';
 import { IssuedSets } from './issued-sets.service';
 import { acknowledgementOf, type LinkedOrder } from './link.service';
+import { ofItsUpholsterer } from './order-access';
 import { sameContent } from './order-content';
 import { linkState } from './order-links';
 import { OUTGOING_KINDS } from './order-mail';
@@ -27,10 +28,12 @@ import { mayChange, maySend, recordableAfter } from './order-states';
 const UNANSWERED = `
   SELECT message.order_id AS "orderId", count(*)::int AS count
     FROM order_messages message
+    JOIN cushion_orders ordered ON ordered.id = message.order_id AND ordered.upholsterer_id = message.upholsterer_id
    WHERE message.order_id = ANY($1) AND message.side = 'upholsterer'
      AND message.at > coalesce(
        (SELECT max(answer.at) FROM order_messages answer
-         WHERE answer.order_id = message.order_id AND answer.side = 'workshop'), '-infinity')
+         WHERE answer.order_id = message.order_id AND answer.upholsterer_id = message.upholsterer_id
+           AND answer.side = 'workshop'), '-infinity')
    GROUP BY message.order_id`;
 
 /** What members and link holders read about an order. */
@@ -59,7 +62,11 @@ export class OrderViews {
       this.summaries([order]),
       linkState(manager, order.id, new Date()),
       acknowledgementOf(manager, order),
-      manager.find(OrderEvent, { where: { orderId: order.id }, order: { at: 'ASC', id: 'ASC' } }),
+      manager.find(OrderEvent, {
+        where: { orderId: order.id },
+        relations: { upholsterer: true },
+        order: { at: 'ASC', id: 'ASC' },
+      }),
       this.mail.latestAbout(manager, order.id, OUTGOING_KINDS),
     ]);
     return {
@@ -100,7 +107,10 @@ export class OrderViews {
       this.productions.forReading(member, order.productionId),
       this.workshops.get(order.workshopId),
       this.users.get(sent.byUserId),
-      manager.find(OrderMessage, { where: { orderId: order.id }, order: { at: 'ASC', id: 'ASC' } }),
+      manager.find(OrderMessage, {
+        where: { orderId: order.id, ...ofItsUpholsterer(order) },
+        order: { at: 'ASC', id: 'ASC' },
+      }),
       acknowledgementOf(manager, order),
     ]);
     return {
@@ -141,7 +151,7 @@ export class OrderViews {
 
 export function messageDto(message: OrderMessage): OrderMessageDto {
   const { id, side, authorName, text, at } = message;
-  return { id, side, authorName, text, at: at.toISOString() };
+  return { id, side, authorName, upholstererName: message.upholsterer?.name, text, at: at.toISOString() };
 }
 
 function summaryOf(order: CushionOrder, openQuestions: number): OrderSummaryDto {
@@ -168,7 +178,18 @@ function upholstererDto(upholsterer: NonNullable<CushionOrder['upholsterer']>): 
 
 function eventDto(event: OrderEvent): OrderEventDto {
   const { kind, at, side, byName, fromState, toState, revisionLetter, note } = event;
-  return { kind, at: at.toISOString(), side, byName, fromState, toState, revisionLetter, note };
+  const upholstererName = event.upholsterer?.name;
+  return {
+    kind,
+    at: at.toISOString(),
+    side,
+    byName,
+    upholstererName,
+    fromState,
+    toState,
+    revisionLetter,
+    note,
+  };
 }
 
 function acknowledgement(event: OrderEvent) {

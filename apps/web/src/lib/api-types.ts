@@ -2229,6 +2229,8 @@ export interface components {
             at: string;
             side: components["schemas"]["OrderSide"];
             byName: string;
+            /** @description who had the order then, if anybody had */
+            upholstererName?: string;
             /** @enum {string|null} */
             fromState: "draft" | "sent" | "quoted" | "agreed" | "first-article" | "in-work" | "shipped" | "received" | "closed" | "cancelled" | null;
             /** @enum {string|null} */
@@ -2302,6 +2304,8 @@ export interface components {
             id: string;
             side: components["schemas"]["OrderSide"];
             authorName: string;
+            /** @description with whom: an order may go to several, one after another */
+            upholstererName?: string;
             text: string;
             /** Format: date-time */
             at: string;

@@ -1,4 +1,4 @@
-import { ApiProperty } from '@nestjs/swagger';
+import { ApiProperty, ApiPropertyOptional } from '@nestjs/swagger';
 import { MAIL_STATES, type MailState } from '../../mail/entities/outbox-mail.entity';
 import { EVENT_KINDS, type EventKind } from '../entities/order-event.entity';
 import { SIDES, type Side } from '../entities/order-message.entity';
@@ -18,6 +18,8 @@ export class OrderEventDto {
   side: Side;
   @ApiProperty()
   byName: string;
+  @ApiPropertyOptional({ description: 'who had the order then, if anybody had' })
+  upholstererName?: string;
   @ApiProperty({ enum: ORDER_STATES, enumName: 'OrderState', nullable: true, type: String })
   fromState: OrderState | null;
   @ApiProperty({ enum: ORDER_STATES, enumName: 'OrderState', nullable: true, type: String })
@@ -142,6 +144,8 @@ export class OrderMessageDto {
   side: Side;
   @ApiProperty()
   authorName: string;
+  @ApiPropertyOptional({ description: 'with whom: an order may go to several, one after another' })
+  upholstererName?: string;
   @ApiProperty()
   text: string;
   @ApiProperty({ format: 'date-time' })

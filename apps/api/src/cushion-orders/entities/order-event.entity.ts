@@ -8,6 +8,7 @@ import {
   PrimaryGeneratedColumn,
   type Relation,
 } from 'typeorm';
+import { Upholsterer } from '../../upholsterers/entities/upholsterer.entity';
 import type { OrderState } from '../order-states';
 import { CushionOrder } from './cushion-order.entity';
 import type { Side } from './order-message.entity';
@@ -35,6 +36,14 @@ export class OrderEvent {
   @ManyToOne(() => CushionOrder, { nullable: false, onDelete: 'CASCADE' })
   @JoinColumn({ name: 'order_id' })
   order?: Relation<CushionOrder>;
+
+  /** Whoever had the order then, or null before anybody had it. */
+  @Column({ type: 'uuid', nullable: true })
+  upholstererId: string | null;
+
+  @ManyToOne(() => Upholsterer, { nullable: true, onDelete: 'RESTRICT' })
+  @JoinColumn({ name: 'upholsterer_id' })
+  upholsterer?: Relation<Upholsterer> | null;
 
   @Column('text')
   kind: EventKind;

@@ -8,6 +8,7 @@ import {
   PrimaryGeneratedColumn,
   type Relation,
 } from 'typeorm';
+import { Upholsterer } from '../../upholsterers/entities/upholsterer.entity';
 import { CushionOrder } from './cushion-order.entity';
 
 export const SIDES = ['workshop', 'upholsterer'] as const;
@@ -25,6 +26,14 @@ export class OrderMessage {
   @ManyToOne(() => CushionOrder, { nullable: false, onDelete: 'CASCADE' })
   @JoinColumn({ name: 'order_id' })
   order?: Relation<CushionOrder>;
+
+  /** The other side at that time; an order may go to another upholsterer later. */
+  @Column({ type: 'uuid', nullable: true })
+  upholstererId: string | null;
+
+  @ManyToOne(() => Upholsterer, { nullable: true, onDelete: 'RESTRICT' })
+  @JoinColumn({ name: 'upholsterer_id' })
+  upholsterer?: Relation<Upholsterer> | null;
 
   @Column('text')
   side: Side;

@@ -2,10 +2,12 @@ import type { MigrationInterface } from 'typeorm';
 import { Accounts1796140800000 } from './1796140800000-accounts';
 import { SetsAndCast1796141100000 } from './1796141100000-sets-and-cast';
 import { CushionOrders1796142000000 } from './1796142000000-cushion-orders';
+import { UpholstererOfMessages1796144400000 } from './1796144400000-upholsterer-of-messages';
 
 /** In the order in which they run. What is merged is never changed. */
 export const MIGRATIONS: (new () => MigrationInterface)[] = [
   Accounts1796140800000,
   SetsAndCast1796141100000,
   CushionOrders1796142000000,
+  UpholstererOfMessages1796144400000,
 ];
