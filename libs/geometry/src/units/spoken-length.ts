@@ -1,3 +1,4 @@
+import { exactParts } from './exact-style.ts';
 import { lengthStep, MM_PER_INCH, type LengthStyle } from './length-style.ts';
 
 const UNITS = [
@@ -28,6 +29,8 @@ const PARTS: Record<number, [string, string]> = {
   4: ['quarter', 'quarters'],
   8: ['eighth', 'eighths'],
   16: ['sixteenth', 'sixteenths'],
+  32: ['thirty-second', 'thirty-seconds'],
+  64: ['sixty-fourth', 'sixty-fourths'],
 };
 
 /**
@@ -38,19 +41,39 @@ const PARTS: Record<number, [string, string]> = {
  * @returns words, with "minus" in front of a negative length
  */
 export function spokenLength(mm: number, style: LengthStyle): string {
-  const steps = Math.round(Math.abs(mm) / lengthStep(style));
-  const sign = mm < 0 && steps > 0 ? 'minus ' : '';
-  if (style.system === 'millimetres') return `${sign}${steps} ${steps === 1 ? 'millimetre' : 'millimetres'}`;
+  const stepMm = lengthStep(style);
+  return sayInSteps(mm < 0, Math.round(Math.abs(mm) / stepMm), stepMm, style);
+}
+
+/**
+ * Says a length that somebody chose, never as another one; the words of `formatExactLength`.
+ *
+ * @param mm - the length, finite
+ * @param style - the display style
+ * @returns words, with "about" in front where the length had to be rounded
+ */
+export function spokenExactLength(mm: number, style: LengthStyle): string {
+  const { stepMm, steps, exact } = exactParts(mm, style);
+  return `${exact ? '' : 'about '}${sayInSteps(mm < 0, steps, stepMm, style)}`;
+}
+
+function sayInSteps(negative: boolean, steps: number, stepMm: number, style: LengthStyle): string {
+  const sign = negative && steps > 0 ? 'minus ' : '';
+  if (style.system === 'millimetres') {
+    const size = Number((steps * stepMm).toFixed(1));
+    return `${sign}${size} ${size === 1 ? 'millimetre' : 'millimetres'}`;
+  }
   if (style.system === 'decimal-inches') {
-    const inches = Number(((steps * lengthStep(style)) / MM_PER_INCH).toFixed(2));
+    const inches = Number(((steps * stepMm) / MM_PER_INCH).toFixed(3));
     return `${sign}${inches} ${inches === 1 ? 'inch' : 'inches'}`;
   }
-  const perFoot = 12 * style.roundTo;
+  const per = Math.round(MM_PER_INCH / stepMm);
+  const perFoot = 12 * per;
   const feet = style.feet === true ? Math.floor(steps / perFoot) : 0;
   const rest = steps - feet * perFoot;
-  if (feet === 0) return `${sign}${spokenInches(rest, style.roundTo)}`;
+  if (feet === 0) return `${sign}${spokenInches(rest, per)}`;
   const feetWords = `${numberWords(feet)} ${feet === 1 ? 'foot' : 'feet'}`;
-  return `${sign}${feetWords}${rest === 0 ? '' : ` ${spokenInches(rest, style.roundTo)}`}`;
+  return `${sign}${feetWords}${rest === 0 ? '' : ` ${spokenInches(rest, per)}`}`;
 }
 
 function spokenInches(parts: number, per: number): string {

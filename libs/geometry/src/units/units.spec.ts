@@ -1,11 +1,11 @@
 import fc from 'fast-check';
 import { describe, expect, it } from 'vitest';
 import { formatAngle, parseAngle } from './angle.ts';
-import { formatLength } from './format-length.ts';
+import { formatExactLength, formatLength } from './format-length.ts';
 import { lengthStep, type LengthStyle } from './length-style.ts';
 import { formatMass, parseMass } from './mass.ts';
 import { parseLength } from './parse-length.ts';
-import { spokenLength } from './spoken-length.ts';
+import { spokenExactLength, spokenLength } from './spoken-length.ts';
 
 const FEET: LengthStyle = { system: 'feet-inches', roundTo: 16, feet: true };
 const INCHES: LengthStyle = { system: 'feet-inches', roundTo: 16 };
@@ -160,6 +160,49 @@ describe('spokenLength', () => {
     [81.5 * 25.4, INCHES, 'eighty-one and one half inches'],
     [457, METRIC, '457 millimetres'],
   ])('%d mm', (mm, style, words) => expect(spokenLength(mm, style)).toBe(words));
+});
+
+describe('a length that somebody chose', () => {
+  const inches = (size: number) => size * 25.4;
+  it.each([
+    [inches(28.5), EIGHTHS, '28½″', 'twenty-eight and one half inches'],
+    [inches(28 + 7 / 16), EIGHTHS, '28⁷⁄₁₆″', 'twenty-eight and seven sixteenths inches'],
+    [inches(28 + 7 / 16) + 0.04, EIGHTHS, '28⁷⁄₁₆″', 'twenty-eight and seven sixteenths inches'],
+    [inches(17 + 3 / 32), INCHES, '17³⁄₃₂″', 'seventeen and three thirty-seconds inches'],
+    [inches(17 + 1 / 64), INCHES, '17¹⁄₆₄″', 'seventeen and one sixty-fourth inches'],
+    [
+      inches(43 + 7 / 16),
+      { ...EIGHTHS, feet: true },
+      '3′\u00a07⁷⁄₁₆″',
+      'three feet seven and seven sixteenths inches',
+    ],
+    [457, EIGHTHS, '≈18″', 'about eighteen inches'],
+    [-457, EIGHTHS, '≈−18″', 'about minus eighteen inches'],
+    [457.2, METRIC, '457.2\u202fmm', '457.2 millimetres'],
+    [457.03, METRIC, '457\u202fmm', '457 millimetres'],
+    [inches(28 + 7 / 16), DECIMAL, '28.438″', '28.438 inches'],
+    [inches(28.41), DECIMAL, '28.41″', '28.41 inches'],
+    [inches(28.4), { ...DECIMAL, roundTo: 8 } as const, '28.4″', '28.4 inches'],
+    [0, EIGHTHS, '0″', 'zero inches'],
+  ])('%d mm', (mm, style, text, words) => {
+    expect(formatExactLength(mm, style)).toBe(text);
+    expect(spokenExactLength(mm, style)).toBe(words);
+  });
+
+  it('never shows one length as another without saying so', () => {
+    for (let mm = 300; mm < 900; mm += 0.37) {
+      for (const [style, unit] of [
+        [EIGHTHS, 'in'],
+        [DECIMAL, 'in'],
+        [METRIC, 'mm'],
+      ] as const) {
+        const shown = formatExactLength(mm, style);
+        if (shown.startsWith('≈')) continue;
+        const read = parseLength(shown, unit);
+        expect(read.ok && Math.abs(read.value - mm)).toBeLessThan(0.0501);
+      }
+    }
+  });
 });
 
 describe('angles and masses', () => {

@@ -1,13 +1,14 @@
 import {
   formatAngle,
-  formatLength,
+  formatExactLength,
   lengthStep,
   parseAngle,
   parseLength,
-  spokenLength,
+  spokenExactLength,
   type LengthStyle,
   type Parameter,
 } from '@settlewright/geometry';
+import { typedForm } from '@/components/measure.tsx';
 
 /** What was typed into a number, and what it would mean. */
 export type Reading =
@@ -32,18 +33,19 @@ export const styleFor = (parameter: Pick<NumberParameter, 'key'>, style: LengthS
   feet: inFeet(parameter),
 });
 
+/** A number that somebody chose, never shown as another one. */
 export function showNumber(parameter: NumberParameter, style: LengthStyle, value = parameter.value): string {
-  if (parameter.kind === 'length') return formatLength(value, styleFor(parameter, style));
+  if (parameter.kind === 'length') return formatExactLength(value, styleFor(parameter, style));
   if (parameter.kind === 'angle') return formatAngle(value);
   return parameter.unit === '' ? String(value) : `${Math.round(value)}\u202f${parameter.unit}`;
 }
 
 export function sayNumber(parameter: NumberParameter, style: LengthStyle, value = parameter.value): string {
-  if (parameter.kind === 'length') return spokenLength(value, styleFor(parameter, style));
+  if (parameter.kind === 'length') return spokenExactLength(value, styleFor(parameter, style));
   return parameter.kind === 'angle' ? `${value} degrees` : showNumber(parameter, style, value);
 }
 
-/** The same value in the other system, so that a reader can check it: "457 mm". */
+/** The same value in the other system, so that a reader can check it: "457.2 mm". */
 export function inOtherUnits(
   parameter: NumberParameter,
   style: LengthStyle,
@@ -54,7 +56,7 @@ export function inOtherUnits(
     style.system === 'millimetres'
       ? { system: 'feet-inches', roundTo: style.roundTo, feet: inFeet(parameter) }
       : { system: 'millimetres', roundTo: style.roundTo };
-  return formatLength(value, other);
+  return formatExactLength(value, other);
 }
 
 export function stepOf(parameter: NumberParameter, style: LengthStyle): number {
@@ -77,7 +79,8 @@ export function stepped(
 
 function readPlain(parameter: NumberParameter, text: string, style: LengthStyle): Reading {
   if (parameter.kind === 'length') {
-    const read = parseLength(text, style.system === 'millimetres' ? 'mm' : 'in', {
+    // A shown value may have been begun from: what is changed of it is meant as typed.
+    const read = parseLength(text.replace(/^\s*≈/, ''), style.system === 'millimetres' ? 'mm' : 'in', {
       negative: parameter.min < 0,
     });
     if (read.ok) return { kind: 'value', value: read.value };
@@ -101,12 +104,17 @@ function readPlain(parameter: NumberParameter, text: string, style: LengthStyle)
       };
 }
 
+function saysPresent(parameter: NumberParameter, text: string, style: LengthStyle): boolean {
+  const shown = showNumber(parameter, style);
+  return [shown, typedForm(shown)].some((form) => form.trim() === text.trim());
+}
+
 /** Reads what was typed into a number of a piece. */
 export function readNumber(parameter: NumberParameter, text: string, style: LengthStyle): Reading {
   const reading = readPlain(parameter, text, style);
   if (reading.kind !== 'value') return reading;
   // Text that shows the present value means that value, with all its millimetres.
-  if (text.trim() === showNumber(parameter, style).trim()) return { kind: 'value', value: parameter.value };
+  if (saysPresent(parameter, text, style)) return { kind: 'value', value: parameter.value };
   const { value } = reading;
   if (value > parameter.max + 1e-6) return { kind: 'outside', value, limit: parameter.max, which: 'longest' };
   if (value < parameter.min - 1e-6)

@@ -1,5 +1,12 @@
 import type { FitSheet } from '@settlewright/anthropometry';
-import { formatLength, spokenLength, type LengthStyle, type TapeLine } from '@settlewright/geometry';
+import {
+  formatExactLength,
+  formatLength,
+  spokenExactLength,
+  spokenLength,
+  type LengthStyle,
+  type TapeLine,
+} from '@settlewright/geometry';
 import { verdictWord } from '@/components/verdict.tsx';
 import { worstCell } from '../verdict-words.ts';
 
@@ -26,13 +33,20 @@ export function tapesAtRest(
   return [...own.slice(0, Math.max(1, most - gaps.length)), ...gaps];
 }
 
+const styleOf = (tape: TapeLine, style: LengthStyle): LengthStyle => ({
+  ...style,
+  feet: /length/i.test(tape.parameterKey ?? ''),
+});
+
+/** A number that was chosen reads as in the sentence; what follows from others is rounded. */
 export const showTape = (tape: TapeLine, style: LengthStyle): string =>
-  formatLength(tape.valueMm, { ...style, feet: /length/i.test(tape.parameterKey ?? '') });
+  (tape.kind === 'dimension' ? formatExactLength : formatLength)(tape.valueMm, styleOf(tape, style));
 
 /** Full name of a tape for a list or a screen reader. */
 export function sayTape(tape: TapeLine, style: LengthStyle): string {
   const verdict = tape.verdict ? `, ${verdictWord(tape.verdict)}` : '';
-  return `${tape.name}, ${spokenLength(tape.valueMm, style)}, ${tape.describes}${verdict}`;
+  const say = tape.kind === 'dimension' ? spokenExactLength : spokenLength;
+  return `${tape.name}, ${say(tape.valueMm, styleOf(tape, style))}, ${tape.describes}${verdict}`;
 }
 
 export function tapeTone(tape: TapeLine): 'chalk' | 'ink' | 'fits' | 'tight' | 'wont' | 'unknown' {
