@@ -13,7 +13,7 @@ interface Props {
 
 /** What the drawing shows, for those who do not see it: pieces, bodies and every tape by its full name. */
 export function TextTwin({ id, picture, tapes, onOpenCell }: Props) {
-  const { style } = useSurroundings();
+  const { style, detail } = useSurroundings();
   const { document, bodies } = picture;
   return (
     <div className="sr-only">
@@ -29,10 +29,10 @@ export function TextTwin({ id, picture, tapes, onOpenCell }: Props) {
           {tapes.map((tape) => (
             <li key={tape.id}>
               {tape.cellId === undefined ? (
-                sayTape(tape, style)
+                sayTape(tape, style, detail)
               ) : (
                 <button type="button" tabIndex={-1} onClick={() => onOpenCell(tape.cellId ?? '')}>
-                  {sayTape(tape, style)}, open the check
+                  {sayTape(tape, style, detail)}, open the check
                 </button>
               )}
             </li>

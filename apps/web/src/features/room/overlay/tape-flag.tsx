@@ -51,6 +51,7 @@ export function TapeFlag(props: Props) {
 }
 
 function PlainFlag({ tape, style, litCellId, onOpenCell }: Props) {
+  const { detail } = useSurroundings();
   const lit = tape.cellId !== undefined && tape.cellId === litCellId;
   const tone = tapeTone(tape);
   const look = classNames(FLAG, lit ? LIT[tone] : classNames('bg-sheet', REST[tone]));
@@ -58,14 +59,14 @@ function PlainFlag({ tape, style, litCellId, onOpenCell }: Props) {
     <>
       {tape.name}{' '}
       <strong className="font-semibold">
-        <Measure text={showTape(tape, style)} />
+        <Measure text={showTape(tape, style, detail)} />
       </strong>
     </>
   );
   const { cellId } = tape;
   if (cellId === undefined) {
     return (
-      <span role="img" aria-label={sayTape(tape, style)} className={classNames('block', look)}>
+      <span role="img" aria-label={sayTape(tape, style, detail)} className={classNames('block', look)}>
         {words}
       </span>
     );
@@ -73,7 +74,7 @@ function PlainFlag({ tape, style, litCellId, onOpenCell }: Props) {
   return (
     <button
       type="button"
-      aria-label={`${sayTape(tape, style)}, open the check`}
+      aria-label={`${sayTape(tape, style, detail)}, open the check`}
       onClick={() => onOpenCell(cellId)}
       className={classNames('quick block', look)}
     >
@@ -89,6 +90,7 @@ function EditableFlag({
   parameter,
   onLayout,
 }: Props & { pieceId: string; parameter: NumberParameter }) {
+  const { detail } = useSurroundings();
   const change = useChangeNumber(pieceId, parameter);
   const field = useRef<HTMLInputElement>(null);
   const button = useRef<HTMLButtonElement>(null);
@@ -117,7 +119,7 @@ function EditableFlag({
       <button
         ref={button}
         type="button"
-        aria-label={`${sayTape(tape, style)}, edit`}
+        aria-label={`${sayTape(tape, style, detail)}, edit`}
         onClick={() => begin()}
         onBlur={() => setBack(false)}
         onKeyDown={(event) => {
@@ -135,7 +137,7 @@ function EditableFlag({
       >
         {tape.name}{' '}
         <strong className="font-semibold">
-          <Measure text={showTape(tape, style)} />
+          <Measure text={showTape(tape, style, detail)} />
         </strong>
       </button>
     );

@@ -8,6 +8,7 @@ import {
   type TapeLine,
 } from '@settlewright/geometry';
 import { verdictWord } from '@/components/verdict.tsx';
+import type { RoomSurroundings } from '../room-context.tsx';
 import { worstCell } from '../verdict-words.ts';
 
 /** Heights first: they decide most and are seen best from the aisle. */
@@ -33,20 +34,28 @@ export function tapesAtRest(
   return [...own.slice(0, Math.max(1, most - gaps.length)), ...gaps];
 }
 
+type Detail = RoomSurroundings['detail'];
+
 const styleOf = (tape: TapeLine, style: LengthStyle): LengthStyle => ({
   ...style,
   feet: /length/i.test(tape.parameterKey ?? ''),
 });
 
-/** A number that was chosen reads as in the sentence; what follows from others is rounded. */
-export const showTape = (tape: TapeLine, style: LengthStyle): string =>
-  (tape.kind === 'dimension' ? formatExactLength : formatLength)(tape.valueMm, styleOf(tape, style));
+/**
+ * A number that was chosen reads as in the sentence; what follows from others is rounded. Whoever sees
+ * verdicts alone sees a body drawn in round sizes, so a gap to it has a verdict and no number.
+ */
+export function showTape(tape: TapeLine, style: LengthStyle, detail: Detail): string {
+  if (tape.kind === 'gap' && detail === 'verdicts') return tape.verdict ? verdictWord(tape.verdict) : '';
+  return (tape.kind === 'dimension' ? formatExactLength : formatLength)(tape.valueMm, styleOf(tape, style));
+}
 
 /** Full name of a tape for a list or a screen reader. */
-export function sayTape(tape: TapeLine, style: LengthStyle): string {
-  const verdict = tape.verdict ? `, ${verdictWord(tape.verdict)}` : '';
+export function sayTape(tape: TapeLine, style: LengthStyle, detail: Detail): string {
   const say = tape.kind === 'dimension' ? spokenExactLength : spokenLength;
-  return `${tape.name}, ${say(tape.valueMm, styleOf(tape, style))}, ${tape.describes}${verdict}`;
+  const size = tape.kind === 'gap' && detail === 'verdicts' ? [] : [say(tape.valueMm, styleOf(tape, style))];
+  const verdict = tape.verdict ? [verdictWord(tape.verdict)] : [];
+  return [tape.name, ...size, tape.describes, ...verdict].join(', ');
 }
 
 export function tapeTone(tape: TapeLine): 'chalk' | 'ink' | 'fits' | 'tight' | 'wont' | 'unknown' {
