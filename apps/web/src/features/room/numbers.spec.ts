@@ -32,3 +32,26 @@ describe('a number that was typed finer than lengths are shown', () => {
     expect(readNumber(odd, '≈28 1/2″', EIGHTHS)).toEqual({ kind: 'value', value: inches(28.5) });
   });
 });
+
+describe('text with two readings', () => {
+  const length = { ...tableTop, key: 'lengthMm', min: inches(24), max: inches(96), value: inches(48) };
+  const seat = { ...tableTop, key: 'pressedSeatHeight', min: inches(10), max: inches(30), value: inches(18) };
+
+  it('offers both where both are possible, and drops the one that is not', () => {
+    expect(readNumber(length, '6 3', EIGHTHS)).toMatchObject({
+      kind: 'ambiguous',
+      readings: [inches(75), expect.closeTo(inches(63), 6)],
+    });
+    expect(readNumber({ ...length, max: inches(70) }, '6 3', EIGHTHS)).toMatchObject({
+      kind: 'ambiguous',
+      readings: [expect.closeTo(inches(63), 6)],
+    });
+  });
+
+  it('is refused in words where neither is possible', () => {
+    expect(readNumber(seat, '6 3', EIGHTHS)).toEqual({
+      kind: 'unreadable',
+      message: '“6 3” can be read in more than one way, and none is possible here. Type 10″ to 30″.',
+    });
+  });
+});

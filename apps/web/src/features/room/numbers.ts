@@ -109,9 +109,26 @@ function saysPresent(parameter: NumberParameter, text: string, style: LengthStyl
   return [shown, typedForm(shown)].some((form) => form.trim() === text.trim());
 }
 
+/** Of two readings only those that are possible here are worth a choice. */
+function possibleOf(
+  parameter: NumberParameter,
+  text: string,
+  style: LengthStyle,
+  reading: Extract<Reading, { kind: 'ambiguous' }>,
+): Reading {
+  const readings = reading.readings.filter((value) => value >= parameter.min && value <= parameter.max);
+  if (readings.length > 0) return { ...reading, readings };
+  const [least, most] = [parameter.min, parameter.max].map((value) => showNumber(parameter, style, value));
+  return {
+    kind: 'unreadable',
+    message: `“${text.trim()}” can be read in more than one way, and none is possible here. Type ${least} to ${most}.`,
+  };
+}
+
 /** Reads what was typed into a number of a piece. */
 export function readNumber(parameter: NumberParameter, text: string, style: LengthStyle): Reading {
   const reading = readPlain(parameter, text, style);
+  if (reading.kind === 'ambiguous') return possibleOf(parameter, text, style, reading);
   if (reading.kind !== 'value') return reading;
   // Text that shows the present value means that value, with all its millimetres.
   if (saysPresent(parameter, text, style)) return { kind: 'value', value: parameter.value };
