@@ -4,6 +4,7 @@ import { MarkTag } from '@/components/mark-tag.tsx';
 import { Measure } from '@/components/measure.tsx';
 import { useFormat } from '@/lib/format.ts';
 import type { OrderSpec } from '../order.ts';
+import { foamText, otherSystem, runText, sizeTexts, toleranceText } from '../size-words.ts';
 import { CushionDrawing } from './cushion-drawing.tsx';
 
 const HAND_WORDS: Record<CushionSpec['hand'], string> = {
@@ -14,18 +15,15 @@ const HAND_WORDS: Record<CushionSpec['hand'], string> = {
 
 /** Three sizes in a row, the unit once at the end. */
 function Sizes({ size }: { size: CushionSpec['finishedMm'] }) {
-  const format = useFormat();
-  const [width, depth, thickness] = [size.widthMm, size.depthMm, size.thicknessMm].map((mm) =>
-    format.length(mm),
-  );
-  const bare = (text = '') => text.replace(/″$|[  ]?mm$/u, '');
+  const { style } = useFormat();
+  const [width, depth, thickness] = sizeTexts(size, style);
   return (
     <>
-      <Measure text={bare(width)} />
+      <Measure text={width} />
       <span className="px-1.5 text-base text-ink-3">×</span>
-      <Measure text={bare(depth)} />
+      <Measure text={depth} />
       <span className="px-1.5 text-base text-ink-3">×</span>
-      <Measure text={thickness ?? ''} />
+      <Measure text={thickness} />
     </>
   );
 }
@@ -49,9 +47,8 @@ function Facts({ spec, words }: { spec: CushionSpec; words: OrderSpec }) {
         {show(spec.placeMm.widthMm)} × {show(spec.placeMm.depthMm)}, wood to wood
       </Row>
       <Row name="Foam">
-        {show(cut.foamMm.widthMm)} × {show(cut.foamMm.depthMm)} × {show(cut.foamMm.thicknessMm)}, {foam.grade}
-        , {(foam.densityKgM3 / 16.018463).toFixed(1)} lb/ft³, firmness {Math.round(foam.ifd25N / 4.4482216)}{' '}
-        lb (25 % IFD)
+        {show(cut.foamMm.widthMm)} × {show(cut.foamMm.depthMm)} × {show(cut.foamMm.thicknessMm)},{' '}
+        {foamText(foam, format.style)}
         {words.foam !== '' && `; ${words.foam}`}
       </Row>
       <Row name="Cloth cut">
@@ -60,7 +57,8 @@ function Facts({ spec, words }: { spec: CushionSpec; words: OrderSpec }) {
       </Row>
       {words.cover !== '' && <Row name="Cover">{words.cover}</Row>}
       <Row name="Welt">
-        {show(cut.welt.lengthMm)} for {cut.welt.seams} seams{words.welt !== '' && `; ${words.welt}`}
+        {show(cut.welt.lengthMm)} ({runText(cut.welt.lengthMm, format.style)}) for {cut.welt.seams} seams
+        {words.welt !== '' && `; ${words.welt}`}
       </Row>
       <Row name="Closure">
         Zip {show(cut.zip.lengthMm)} in the {spec.zipEdge} edge, {show(cut.zip.wrapMm)} round each corner
@@ -82,7 +80,9 @@ const NUMBER_OF_WIDTH = 0.1;
 
 function Group({ group, words }: { group: CushionGroup; words: OrderSpec }) {
   const { spec, marks, mirroredMarks } = group;
-  const { widthMm, depthMm, thicknessMm } = spec.finishedMm;
+  const { style } = useFormat();
+  const { widthMm, depthMm } = spec.finishedMm;
+  const other = sizeTexts(spec.finishedMm, otherSystem(style));
   const drawing = useMemo(
     () => cushionDrawing(spec, { labelMm: NUMBER_OF_WIDTH * Math.max(widthMm, depthMm) }),
     [spec, widthMm, depthMm],
@@ -104,8 +104,8 @@ function Group({ group, words }: { group: CushionGroup; words: OrderSpec }) {
             <Sizes size={spec.finishedMm} />
           </p>
           <p className="text-sm text-ink-2">
-            Finished, seam to seam. {Math.round(widthMm)} × {Math.round(depthMm)} × {Math.round(thicknessMm)}{' '}
-            mm, ± <Measure text="¼″" />. {seat ? 'Seat' : 'Back'} of {spec.benchMark}.
+            Finished, seam to seam. <Measure text={other.join(' × ')} />,{' '}
+            <Measure text={toleranceText(style)} />. {seat ? 'Seat' : 'Back'} of {spec.benchMark}.
           </p>
           {mirroredMarks.length > 0 && (
             <p className="mt-2 text-sm text-ink-2">{mirroredMarks.join(', ')}: the same, mirrored.</p>

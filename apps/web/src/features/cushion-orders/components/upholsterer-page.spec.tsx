@@ -1,4 +1,4 @@
-import { screen, within } from '@testing-library/react';
+import { screen, waitFor, within } from '@testing-library/react';
 import userEvent from '@testing-library/user-event';
 import { http, HttpResponse } from 'msw';
 import { describe, expect, it } from 'vitest';
@@ -21,6 +21,17 @@ describe('the order behind a private link', () => {
     expect(await screen.findByRole('heading', { name: 'Dining car, seat cushions' })).toBeVisible();
     expect(screen.getAllByRole('img', { name: /plan with measures/ })).not.toHaveLength(0);
     expect(screen.getAllByText('Plum moquette')[0]).toBeVisible();
+  });
+
+  it('is in millimetres throughout where the workshop works in them, with inches beside the size', async () => {
+    server.use(http.get(LINK, () => HttpResponse.json({ ...PUBLIC_ORDER, units: 'millimetres' })));
+    show();
+    const [group] = await screen.findAllByRole('region', { name: /^Cushions / });
+    await waitFor(() => expect(group).toHaveTextContent(/± 6\smm/));
+    expect(group).toHaveTextContent(/seam to seam\. .* × .*″, ± 6/);
+    expect(group).toHaveTextContent(/kg\/m³, firmness \d+\sN/);
+    expect(group).toHaveTextContent(/\d+\smm \(\d+\.\d\sm\) for 2 seams/);
+    expect(group).not.toHaveTextContent(/lb|¼″/);
   });
 
   it('is agreed to with a typed name, for exactly what was sent', async () => {
