@@ -237,6 +237,11 @@ describe('revisions and fit sheets', () => {
       const personal = lines.filter(([section, , , , , , , says]) => section === 'sitter' && says === 'fits');
       expect(personal.length).toBeGreaterThan(0);
       expect(personal.every((line) => line.length === 13)).toBe(true);
+      const lengths = personal.filter((line) => line[11] === 'mm');
+      expect(lengths.length).toBeGreaterThan(0);
+      for (const [, , , , , , , , ...margins] of lengths) {
+        expect(margins.slice(0, 3).filter((mm) => Number(mm) % 5 !== 0)).toEqual([]);
+      }
       const pdf = await as(test, person).get(`${place.setPath}/draft/fit-sheet.pdf`).expect(200);
       expect(pdf.headers['content-type']).toBe('application/pdf');
     });

@@ -1,5 +1,14 @@
 import { describe, expect, it } from '@jest/globals';
-import { ARRANGEMENTS, measureSet, type SetDocument, type SitterRef } from '@settlewright/geometry';
+import {
+  ARRANGEMENTS,
+  type FigureMeans,
+  mannequinMesh,
+  measureSet,
+  placeFrames,
+  poseMannequin,
+  type SetDocument,
+  type SitterRef,
+} from '@settlewright/geometry';
 import type { CastPerson } from '../cast/known-person';
 import { FitCheckService } from './fit-check.service';
 
@@ -56,5 +65,24 @@ describe('fit sheets made on the server', () => {
     expect(body!.means.stature).toBe(1520);
     expect(body!.shoeMm).toBe(40);
     expect(body!.means).not.toHaveProperty('weight_kg');
+  });
+
+  it('tell of a body what its drawing reads, and nothing else', () => {
+    const document = withSitters({ kind: 'cast', castId: HETTY.id });
+    const [body] = fit.bodiesFor(document, [HETTY]);
+    const situation = measureSet(document).places.find(({ placeId }) => placeId === body!.placeId)!;
+    const frame = document.pieces
+      .flatMap((piece) => placeFrames(piece, document))
+      .find(({ placeId }) => placeId === body!.placeId)!;
+    const read = new Set<PropertyKey>();
+    const means = new Proxy<FigureMeans>(body!.means, {
+      get: (target, key) => {
+        read.add(key);
+        return target[key as keyof FigureMeans];
+      },
+    });
+    mannequinMesh(poseMannequin({ means, shoeMm: body!.shoeMm, frame, situation, sinkMm: 0 }));
+    read.delete('weight_kg');
+    expect(Object.keys(body!.means).sort()).toEqual([...read].map(String).sort());
   });
 });

@@ -48,7 +48,11 @@ export class FitSheetsService {
 
   private shown(member: MemberInfo, sheet: FitSheet, document: SetDocument, people: CastPerson[]): SeenSheet {
     if (seesMeasures(member)) return { detail: 'full', ...sheet };
-    return { detail: 'verdicts', ...verdictsOnly(sheet), bodies: this.fit.bodiesFor(document, people) };
+    return {
+      detail: 'verdicts',
+      ...verdictsOnly(sheet, this.fit.ruleBook),
+      bodies: this.fit.bodiesFor(document, people),
+    };
   }
 
   private async people(productionId: string, document: SetDocument): Promise<CastPerson[]> {

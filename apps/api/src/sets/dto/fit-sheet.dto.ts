@@ -19,7 +19,7 @@ export class RoundedBodyDto {
   @ApiProperty({
     type: 'object',
     additionalProperties: { type: 'number' },
-    description: 'millimetres rounded to 20, by body measure; without weight',
+    description: 'millimetres rounded to 20, by body measure: what shapes a drawing, without weight',
   })
   means: Record<string, number>;
   @ApiProperty({ description: 'millimetres rounded to 20' })
