@@ -46,7 +46,7 @@ describe('the private link to an order', () => {
   afterAll(() => test.close());
 
   /** A sent order with the token that went out. */
-  const sendOrder = async (title = 'Seat cushions') => {
+  const sendOrder = async (title = 'Seat cushions', sender = owner) => {
     count += 1;
     const email = `firm-${count}@upholstery.test`;
     const firm = await as(test, owner)
@@ -58,7 +58,7 @@ describe('the private link to an order', () => {
       .send({ setId: made.setId, revisionLetter: 'A', title, spec: { cover: 'plum moquette' } })
       .expect(201);
     const path = `${made.orders}/${(order.body as { id: string }).id}`;
-    await as(test, owner)
+    await as(test, sender)
       .post(`${path}/send`)
       .send({ upholstererId: (firm.body as { id: string }).id, message: 'Good morning.' })
       .expect(200);
@@ -243,6 +243,28 @@ describe('the private link to an order', () => {
     expect((await as(test, owner).get(path).expect(200)).body).toMatchObject({ openQuestions: 0 });
     await answer(token, 'reply', { text: '' }).expect(400);
     await answer(token, 'reply', { text: 'x'.repeat(4001) }).expect(400);
+  });
+
+  it.each([
+    [
+      'left',
+      (userId: string) => test.dataSource.query('DELETE FROM memberships WHERE user_id = $1', [userId]),
+    ],
+    [
+      'no longer reads messages',
+      (userId: string) =>
+        test.dataSource.query(`UPDATE memberships SET role = 'carpenter' WHERE user_id = $1`, [userId]),
+    ],
+  ])('goes to the first owner when its sender %s', async (_what, change) => {
+    const sender = await createMember(test, made.workshop.id, 'designer');
+    await createMember(test, made.workshop.id, 'owner');
+    const { token } = await sendOrder('Sent by another', sender);
+    expect((await open(token).expect(200)).body).toMatchObject({ workshop: { contactName: sender.name } });
+    await change(sender.id);
+    const { body } = await answer(token, 'reply', { text: `Is ${sender.id} there?` }).expect(200);
+    expect(body).toMatchObject({ workshop: { contactName: owner.name } });
+    expect(await findMail(test, sender.email, 'cushion-order-reply')).toBeNull();
+    expect((await findMail(test, owner.email, 'cushion-order-reply'))?.text).toContain(sender.id);
   });
 
   it('keeps the typed name, time and revision of an acknowledgement, once', async () => {

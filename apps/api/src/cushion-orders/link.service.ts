@@ -6,13 +6,13 @@ import { Problem } from '../common/problem';
 import { hashToken } from '../common/secret-token';
 import { InjectSettings, type Settings } from '../config/settings';
 import { MailService, type MailToSend } from '../mail/mail.service';
-import { UsersService } from '../users/users.service';
 import type { CushionOrder } from './entities/cushion-order.entity';
 import { OrderEvent } from './entities/order-event.entity';
 import { OrderLink } from './entities/order-link.entity';
 import { OrderMessage } from './entities/order-message.entity';
 import { isLinkToken } from './link-token';
 import { lockOrder, ofItsUpholsterer } from './order-access';
+import { contactOf } from './order-contact';
 import type { SentContent } from './order-content';
 import { acknowledgedMail, replyMail, type UpholstererNews } from './order-mail';
 import { recordEvent } from './order-record';
@@ -30,7 +30,6 @@ export class LinkService {
   constructor(
     @InjectDataSource() private readonly dataSource: DataSource,
     @InjectSettings() private readonly config: Settings,
-    private readonly users: UsersService,
     private readonly mail: MailService,
     private readonly audit: AuditService,
   ) {}
@@ -122,7 +121,7 @@ export class LinkService {
     manager: EntityManager,
     order: CushionOrder & { sent: SentContent },
   ): Promise<UpholstererNews> {
-    const contact = await this.users.get(order.sent.byUserId, manager);
+    const contact = await contactOf(manager, order, order.sent);
     return {
       to: contact.email,
       recipientName: contact.name,

@@ -4,7 +4,6 @@ import { DataSource } from 'typeorm';
 import type { MemberInfo } from '../common/access.decorator';
 import { MailService } from '../mail/mail.service';
 import { ProductionsService } from '../productions/productions.service';
-import { UsersService } from '../users/users.service';
 import { WorkshopsService } from '../workshops/workshops.service';
 import type {
   OrderDto,
@@ -20,6 +19,7 @@ import { OrderMessage } from './entities/order-message.entity';
 import { IssuedSets } from './issued-sets.service';
 import { acknowledgementOf, type LinkedOrder } from './link.service';
 import { ofItsUpholsterer } from './order-access';
+import { contactOf } from './order-contact';
 import { sameContent } from './order-content';
 import { linkState } from './order-links';
 import { OUTGOING_KINDS } from './order-mail';
@@ -44,7 +44,6 @@ export class OrderViews {
     private readonly issued: IssuedSets,
     private readonly productions: ProductionsService,
     private readonly workshops: WorkshopsService,
-    private readonly users: UsersService,
     private readonly mail: MailService,
   ) {}
 
@@ -106,7 +105,7 @@ export class OrderViews {
       this.issued.read(place),
       this.productions.forReading(member, order.productionId),
       this.workshops.get(order.workshopId),
-      this.users.get(sent.byUserId),
+      contactOf(manager, order, sent),
       manager.find(OrderMessage, {
         where: { orderId: order.id, ...ofItsUpholsterer(order) },
         order: { at: 'ASC', id: 'ASC' },
