@@ -40,6 +40,7 @@ export function KeyPlan({ picture, address }: Props) {
   const { minX, maxX, minZ, maxZ } = plan;
   const scale = Math.min((WIDTH - LEFT - 6) / (maxX - minX), TALLEST / (maxZ - minZ));
   const height = (maxZ - minZ) * scale;
+  const tall = height + BOTTOM + 10;
   const x = (mm: number) => LEFT + (mm - minX) * scale;
   const z = (mm: number) => 8 + (mm - minZ) * scale;
   const selected = document.pieces.find((piece) => piece.id === address.pieceId);
@@ -79,10 +80,10 @@ export function KeyPlan({ picture, address }: Props) {
         value={address.view}
         onChange={address.show}
         aria-label="View"
-        className="relative"
-        style={{ width: WIDTH, height: height + BOTTOM + 10 }}
+        className="relative w-full"
+        style={{ maxWidth: WIDTH, aspectRatio: `${WIDTH} / ${tall}` }}
       >
-        <svg width={WIDTH} height={height + BOTTOM} aria-hidden="true" className="tape absolute inset-0">
+        <svg viewBox={`0 0 ${WIDTH} ${tall}`} aria-hidden="true" className="tape absolute inset-0 size-full">
           {ORDER.flatMap((kind) => document.pieces.filter((piece) => piece.kind === kind)).map((piece) => (
             <polygon
               key={piece.id}
@@ -121,7 +122,10 @@ export function KeyPlan({ picture, address }: Props) {
             aria-label={`${letter}, ${VIEW_TITLES[letter].toLowerCase()}`}
             title={VIEW_TITLES[letter]}
             className="quick absolute flex size-[30px] -translate-1/2 cursor-pointer items-center justify-center rounded-sm data-focus:shadow-(--focus-ring)"
-            style={{ left: eyes[letter].left, top: eyes[letter].top }}
+            style={{
+              left: `${(eyes[letter].left / WIDTH) * 100}%`,
+              top: `${(eyes[letter].top / tall) * 100}%`,
+            }}
           >
             <EyeMark letter={letter} chosen={letter === address.view} turnDeg={eyes[letter].turn} />
           </Radio>

@@ -77,7 +77,7 @@ export function RoomDesk({ lastRevision, foot, aboutPiece }: Props) {
         <h1 className="sr-only" tabIndex={-1} data-page-heading>
           {setName}
         </h1>
-        <div className="mx-auto grid min-h-0 w-full max-w-[90rem] flex-1 gap-x-10 px-8 pt-4 max-tablet:px-4 max-tablet:pt-2 tablet:grid-cols-[15rem_minmax(0,1fr)]">
+        <div className="mx-auto grid min-h-0 w-full max-w-[90rem] flex-1 gap-x-9 px-8 pt-4 max-tablet:px-4 max-tablet:pt-2 tablet:grid-cols-[16.25rem_minmax(0,1fr)]">
           <div className="flex min-h-0 min-w-0 flex-col gap-2 max-tablet:order-1 tablet:order-2">
             {save.kind === 'refused' && (
               <Notice tone="wont" title="The draft was not taken">
@@ -110,7 +110,7 @@ export function RoomDesk({ lastRevision, foot, aboutPiece }: Props) {
           </div>
           <aside
             aria-label="Pieces, plan and notes"
-            className="flex min-h-0 flex-col gap-5 pb-6 max-tablet:order-2 max-tablet:pt-6 tablet:order-1 tablet:overflow-y-auto tablet:pr-1"
+            className="flex min-h-0 flex-col gap-5 pb-6 max-tablet:order-2 max-tablet:pt-6 tablet:order-1 tablet:overflow-x-hidden tablet:overflow-y-auto tablet:pr-1 tablet:[scrollbar-gutter:stable]"
           >
             <PiecesPanel
               document={document}
