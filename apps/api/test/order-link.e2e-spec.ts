@@ -341,6 +341,14 @@ describe('the private link to an order', () => {
       });
     });
 
+    it('tells the first that it is withdrawn, and not to whom it went', async () => {
+      const { email, orderId } = await sendOn();
+      const mail = await findMail(test, email, 'cushion-order-withdrawn');
+      expect(mail).toMatchObject({ relatedId: orderId, replyTo: owner.email });
+      expect(mail?.text).toContain('“Sent on”, is withdrawn. Please stop any work on it.');
+      expect(mail?.text).not.toContain('Marrow');
+    });
+
     it('does not wait for answers to the first', async () => {
       const { token, sent, path } = await sendOn();
       expect(sent.body).toMatchObject({ openQuestions: 0 });

@@ -24,6 +24,7 @@ import {
   orderMail,
   OUTGOING_KINDS,
   renewedLinkMail,
+  withdrawnMail,
   workshopMessageMail,
 } from './order-mail';
 import { OrderPaper } from './order-paper.service';
@@ -59,6 +60,7 @@ export class OrderCorrespondence {
       const upholsterer = await this.upholsterers.get(member.workshopId, dto.upholstererId, manager);
       if (order.upholstererId !== null && order.upholstererId !== upholsterer.id) {
         await revokeLinks(manager, order.id);
+        await this.withdraw(manager, order, sender);
       }
       const before = order.state;
       order.state = 'sent';
@@ -154,6 +156,29 @@ export class OrderCorrespondence {
       await this.record(manager, member, 'cushion-order.mail-sent-again', order.id);
       return findOrder(manager, place);
     });
+  }
+
+  /** The earlier upholsterer must not work on for nobody. */
+  private async withdraw(
+    manager: EntityManager,
+    order: CushionOrder,
+    sender: { name: string; email: string },
+  ): Promise<void> {
+    const { sent, upholsterer: earlier } = order;
+    if (!sent || !earlier || earlier.removedAt !== null) return;
+    const workshop = await this.workshops.get(order.workshopId, manager);
+    const mail = withdrawnMail({
+      workshopName: workshop.name,
+      workshopTelephone: workshop.telephone,
+      senderName: sender.name,
+      senderEmail: sender.email,
+      upholstererName: earlier.name,
+      upholstererEmail: earlier.email,
+      contactName: earlier.contactName,
+      number: order.number,
+      title: sent.title,
+    });
+    await this.post(manager, order, mail);
   }
 
   private async letter(

@@ -33,7 +33,7 @@ function greeting(letter: { contactName: string; upholstererName: string }): str
   return `Dear ${letter.contactName || letter.upholstererName},`;
 }
 
-function signature(letter: OrderLetter): string {
+function signature(letter: LastLetter): string {
   return [letter.senderName, letter.workshopName, letter.workshopTelephone].filter(Boolean).join('\n');
 }
 
@@ -121,20 +121,30 @@ export function acknowledgedMail(news: UpholstererNews, name: string, revisionLe
   };
 }
 
+/** What a last word about an order says of it: there is no page to look at any more. */
+type LastLetter = Omit<
+  OrderLetter,
+  'linkUrl' | 'linkExpires' | 'message' | 'revisionLetter' | 'neededBy' | 'cushionCount'
+>;
+
 /** That an order is called off. */
-export function cancelledMail(letter: Omit<OrderLetter, 'linkUrl' | 'linkExpires'>): MailToSend {
-  const words = `Cushion order ${letter.number}, “${letter.title}”, is cancelled. Please stop any work on it.`;
+export function cancelledMail(letter: LastLetter): MailToSend {
+  return lastMail(letter, 'cushion-order-cancelled', 'is cancelled');
+}
+
+/** That an order goes to somebody else; to whom is no business of the one who loses it. */
+export function withdrawnMail(letter: LastLetter): MailToSend {
+  return lastMail(letter, 'cushion-order-withdrawn', 'is withdrawn');
+}
+
+function lastMail(letter: LastLetter, kind: string, happened: string): MailToSend {
+  const words = `Cushion order ${letter.number}, “${letter.title}”, ${happened}. Please stop any work on it.`;
   return {
     to: letter.upholstererEmail,
     replyTo: letter.senderEmail,
-    kind: 'cushion-order-cancelled',
-    subject: `Cushion order ${letter.number} from ${letter.workshopName} is cancelled`,
-    text: paragraphs([
-      greeting(letter),
-      words,
-      letter.message,
-      [letter.senderName, letter.workshopName, letter.workshopTelephone].filter(Boolean).join('\n'),
-    ]),
+    kind,
+    subject: `Cushion order ${letter.number} from ${letter.workshopName} ${happened}`,
+    text: paragraphs([greeting(letter), words, signature(letter)]),
   };
 }
 

@@ -66,10 +66,6 @@ export class OrderProgress {
           contactName: told.contactName,
           number: order.number,
           title: order.sent.title,
-          revisionLetter: order.sent.revisionLetter,
-          neededBy: null,
-          cushionCount: order.cushionCount,
-          message: '',
         });
         await this.mail.enqueue(manager, { ...mail, workshopId: order.workshopId, relatedId: order.id });
       }
