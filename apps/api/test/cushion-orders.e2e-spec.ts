@@ -206,6 +206,33 @@ describe('cushion orders', () => {
     );
   });
 
+  it('is agreed only with the word of the upholsterer on what was last sent, or with a note', async () => {
+    const order = await create();
+    const { id: upholstererId } = await upholsterer('agree@fennimore.test');
+    const record = (to: string, note?: string) =>
+      as(test, owner).post(`${made.orders}/${order.id}/state`).send({ to, note });
+    const acknowledge = async () => {
+      const token = await mailedToken(test, 'agree@fennimore.test', 'cushion-order');
+      await as(test, null).post(`/link/${token}/acknowledge`).send({ name: 'Odile Fennimore' }).expect(200);
+    };
+    await send(order.id, upholstererId);
+    await acknowledge();
+    await send(order.id, upholstererId);
+    await record('quoted').expect(200);
+    for (const note of [undefined, '', '  ']) {
+      expect((await record('agreed', note).expect(409)).body).toMatchObject({
+        code: 'not-acknowledged',
+        detail: expect.stringMatching(/through the link.*or write in the note how and with whom/),
+      });
+    }
+    await acknowledge();
+    expect((await record('agreed').expect(200)).body).toMatchObject({ state: 'agreed' });
+
+    await send(order.id, upholstererId);
+    await record('quoted').expect(200);
+    await record('agreed', 'by telephone with Odile').expect(200);
+  });
+
   it('is cancelled before it is shipped, and the upholsterer is told', async () => {
     const order = await create();
     const { id: upholstererId } = await upholsterer('cancel@fennimore.test');

@@ -1,6 +1,6 @@
 import { Injectable } from '@nestjs/common';
 import { InjectDataSource } from '@nestjs/typeorm';
-import { DataSource } from 'typeorm';
+import { DataSource, type EntityManager } from 'typeorm';
 import { AuditService } from '../audit/audit.service';
 import type { MemberInfo } from '../common/access.decorator';
 import { Problem } from '../common/problem';
@@ -8,6 +8,7 @@ import { MailService } from '../mail/mail.service';
 import { UsersService } from '../users/users.service';
 import { WorkshopsService } from '../workshops/workshops.service';
 import type { CushionOrder } from './entities/cushion-order.entity';
+import { acknowledgementOf } from './link.service';
 import { findOrder, lockOrder, type OrderPlace } from './order-access';
 import { sameContent } from './order-content';
 import { cancelledMail } from './order-mail';
@@ -35,6 +36,7 @@ export class OrderProgress {
     return this.dataSource.transaction(async (manager) => {
       const order = await lockOrder(manager, place);
       requireStep(order, to);
+      if (to === 'agreed') await requireAgreement(manager, order, note);
       const from = order.state;
       order.state = to;
       await manager.save(order);
@@ -84,10 +86,21 @@ function requireStep(order: CushionOrder, to: RecordedState): void {
       { state: order.state, accepted: recordableAfter(order.state) },
     );
   }
-  if (to === 'agreed' && order.sent && !sameContent(order.sent, order)) {
+}
+
+/** Both sides on the same paper: the one last sent. */
+async function requireAgreement(manager: EntityManager, order: CushionOrder, note: string): Promise<void> {
+  if (order.sent && !sameContent(order.sent, order)) {
     throw Problem.conflict(
       'changed-since-sent',
       'The order was changed after it was sent. Send it again: both sides agree to the same revision.',
+    );
+  }
+  if (note.trim() === '' && !(await acknowledgementOf(manager, order))) {
+    throw Problem.conflict(
+      'not-acknowledged',
+      'The upholsterer has not yet said through the link that they can make the order as last sent. ' +
+        'Wait for that, or write in the note how and with whom it was agreed.',
     );
   }
 }

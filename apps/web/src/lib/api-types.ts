@@ -1852,7 +1852,7 @@ export interface components {
         RoundedBodyDto: {
             /** @description `pieceId:place` */
             placeId: string;
-            /** @description millimetres rounded to 20, by body measure; without weight */
+            /** @description millimetres rounded to 20, by body measure: what shapes a drawing, without weight */
             means: {
                 [key: string]: number;
             };
@@ -2296,7 +2296,7 @@ export interface components {
         };
         RecordStateDto: {
             to: components["schemas"]["RecordedOrderState"];
-            /** @description how it is known: "by telephone, 2 February" */
+            /** @description how it is known: "by telephone, 2 February"; "agreed" asks for it when the upholsterer has not acknowledged */
             note?: string;
         };
         OrderMessageDto: {

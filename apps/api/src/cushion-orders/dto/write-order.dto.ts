@@ -77,7 +77,11 @@ export class RecordStateDto {
   @IsIn(RECORDED_STATES)
   to: RecordedState;
 
-  @ApiPropertyOptional({ maxLength: 1000, description: 'how it is known: "by telephone, 2 February"' })
+  @ApiPropertyOptional({
+    maxLength: 1000,
+    description:
+      'how it is known: "by telephone, 2 February"; "agreed" asks for it when the upholsterer has not acknowledged',
+  })
   @IsOptional()
   @TextField({ max: 1000, lines: true })
   note?: string;
