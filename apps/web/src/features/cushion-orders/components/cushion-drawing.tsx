@@ -9,8 +9,10 @@ import {
   spreadWords,
   TEXT_PX,
   textWidthPx,
+  wordBox,
   type At,
   type Move,
+  type TextShape,
 } from './drawing-fit.ts';
 
 const PENS: Record<Pen, number> = { hair: 0.75, fine: 1, edge: 1.3, outline: 2, cut: 3.2 };
@@ -94,24 +96,41 @@ function Lines({ shape, at }: { shape: DrawShape; at: At }) {
   }
 }
 
-function Word({ shape, at, move }: { shape: DrawShape & { kind: 'text' }; at: At; move: Move | undefined }) {
-  const [x, y] = [at.x(shape.at[0]), at.y(shape.at[1])];
+interface WordProps {
+  shape: TextShape;
+  at: At;
+  move: Move | undefined;
+}
+
+/** Paper under a word, so that no board line runs through it. */
+function WordGround({ shape, at, move }: WordProps) {
+  const { left, right, top, bottom } = wordBox(shape, at);
+  const { right: aside, down } = move ?? { right: 0, down: 0 };
+  return (
+    <rect
+      x={left + aside}
+      y={top + down}
+      width={right - left}
+      height={bottom - top}
+      fill="var(--color-paper)"
+    />
+  );
+}
+
+function Word({ shape, at, move }: WordProps) {
   const { right, down } = move ?? { right: 0, down: 0 };
-  const turned = shape.upright ? `rotate(-90 ${x} ${y})` : undefined;
+  const [x, y] = [at.x(shape.at[0]), at.y(shape.at[1])];
+  const middle = x + right;
   return (
     <>
       {down > 0 && <path d={`M${x - 6} ${y}L${x - 2} ${y + down}`} fill="none" {...lineOf('hair')} />}
       <text
-        x={x + right}
+        x={middle}
         y={y + down + 4.5}
         textAnchor={shape.anchor}
         fontSize={TEXT_PX}
         fill="var(--color-ink)"
-        transform={turned}
-        paintOrder="stroke"
-        stroke="var(--color-paper)"
-        strokeWidth="5"
-        strokeLinejoin="round"
+        transform={shape.upright ? `rotate(-90 ${middle} ${y})` : undefined}
       >
         {shape.text}
       </text>
@@ -135,7 +154,7 @@ export function CushionDrawing({ drawing, label, leastPx, mostPx = Infinity }: C
     const numberText = (shape: DimensionShape) =>
       [format.length(shape.valueMm), shape.label].filter(Boolean).join(' ');
     const fitted = fitDrawing(drawing, Math.min(mostPx, Math.max(leastPx, widthPx)), numberText);
-    const moves = spreadWords(drawing.shapes, fitted.at);
+    const moves = spreadWords(drawing.shapes, fitted.at, numberText);
     const lowered = Math.max(0, ...[...moves.values()].map(({ down }) => down));
     const box = { ...fitted.box, height: fitted.box.height + lowered };
     return { at: fitted.at, box, numberText, moves };
@@ -162,6 +181,10 @@ export function CushionDrawing({ drawing, label, leastPx, mostPx = Infinity }: C
         {drawing.shapes.map((shape, index) => (
           <Lines key={index} shape={shape} at={at} />
         ))}
+        {drawing.shapes.map(
+          (shape, index) =>
+            shape.kind === 'text' && <WordGround key={index} shape={shape} at={at} move={moves.get(shape)} />,
+        )}
         {drawing.shapes.map((shape, index) => {
           if (shape.kind === 'text')
             return <Word key={index} shape={shape} at={at} move={moves.get(shape)} />;

@@ -8,11 +8,24 @@ export interface At {
 
 /** Size of words and numbers; they keep it whatever the scale. */
 export const TEXT_PX = 13;
-const LETTER_PX = 6.9;
+const LETTER_PX = 8.1;
+const NARROW_PX = 4.2;
+const WIDE_PX = 12.2;
+const NARROW = /[\s\u202fijlrtf.,’′″]/u;
+const WIDE = /[mwMW×]/u;
+/** Kept free between words and what they step aside from. */
+const CLEAR_PX = 8;
 const LINE_PX = 16;
 const LANE_PX = 14;
 
-export const textWidthPx = (text: string) => text.length * LETTER_PX;
+/** Room for a text in the heavier weight; rather too much than a lost first stroke. */
+export const textWidthPx = (text: string) =>
+  [...text].reduce(
+    (sum, letter) => sum + (NARROW.test(letter) ? NARROW_PX : WIDE.test(letter) ? WIDE_PX : LETTER_PX),
+    0,
+  );
+
+export type TextShape = DrawShape & { kind: 'text' };
 
 type Point = readonly [number, number];
 
@@ -47,23 +60,26 @@ function boxAround([x, y]: Point, width: number, height: number): Box {
   return { left: x - width / 2, right: x + width / 2, top: y - height / 2, bottom: y + height / 2 };
 }
 
+/** Where a word stands before it is moved. */
+export function wordBox(shape: TextShape, at: At): Box {
+  const [x, y] = [at.x(shape.at[0]), at.y(shape.at[1])];
+  const width = textWidthPx(shape.text);
+  if (shape.upright) return boxAround([x, y], LINE_PX, width);
+  const middle = shape.anchor === 'middle' ? x : shape.anchor === 'start' ? x + width / 2 : x - width / 2;
+  return boxAround([middle, y], width, LINE_PX);
+}
+
+const numberBox = (shape: DimensionShape, at: At, text: string): Box =>
+  boxAround(dimensionLine(shape, at).middle, textWidthPx(text), LINE_PX);
+
 function boxesOf(shape: DrawShape, at: At, numberText: (shape: DimensionShape) => string): Box[] {
   switch (shape.kind) {
     case 'dimension': {
-      const { a, b, middle } = dimensionLine(shape, at);
-      return [
-        boxAround(a, 2, 2),
-        boxAround(b, 2, 2),
-        boxAround(middle, textWidthPx(numberText(shape)), LINE_PX),
-      ];
+      const { a, b } = dimensionLine(shape, at);
+      return [boxAround(a, 2, 2), boxAround(b, 2, 2), numberBox(shape, at, numberText(shape))];
     }
-    case 'text': {
-      const [x, y] = [at.x(shape.at[0]), at.y(shape.at[1])];
-      const width = textWidthPx(shape.text);
-      if (shape.upright) return [boxAround([x, y], LINE_PX, width)];
-      const middle = shape.anchor === 'middle' ? x : shape.anchor === 'start' ? x + width / 2 : x - width / 2;
-      return [boxAround([middle, y], width, LINE_PX)];
-    }
+    case 'text':
+      return [wordBox(shape, at)];
     case 'circle':
       return [boxAround([at.x(shape.centre[0]), at.y(shape.centre[1])], 6, 6)];
     default:
@@ -96,8 +112,6 @@ export function fitDrawing(
   }
 }
 
-type TextShape = DrawShape & { kind: 'text' };
-
 const isText = (shape: DrawShape): shape is TextShape => shape.kind === 'text';
 
 /** How far words are moved, in pixels. */
@@ -106,27 +120,51 @@ export interface Move {
   down: number;
 }
 
-/** Level words beside an upright one step aside; words one under the other move down until they do not touch. */
-export function spreadWords(shapes: readonly DrawShape[], at: At): Map<DrawShape, Move> {
+const meet = (one: Box, other: Box, clear = 0) =>
+  one.left < other.right + clear &&
+  one.right > other.left - clear &&
+  one.top < other.bottom + clear / 2 &&
+  one.bottom > other.top - clear / 2;
+
+/**
+ * Upright words step aside from numbers, level words from upright ones; words one under the other move
+ * down until they do not touch.
+ */
+export function spreadWords(
+  shapes: readonly DrawShape[],
+  at: At,
+  numberText: (shape: DimensionShape) => string,
+): Map<DrawShape, Move> {
   const texts = shapes.filter(isText);
+  const numbers = shapes
+    .filter((shape) => shape.kind === 'dimension')
+    .map((shape) => numberBox(shape, at, numberText(shape)));
+  const moves = new Map<DrawShape, Move>();
   const upright = texts
     .filter((text) => text.upright)
-    .map((text) => boxAround([at.x(text.at[0]), at.y(text.at[1])], LINE_PX, textWidthPx(text.text)));
-  const moves = new Map<DrawShape, Move>();
+    .map((text) => {
+      const box = wordBox(text, at);
+      const inWay = numbers.find((number) => meet(box, number));
+      if (inWay === undefined) return box;
+      const toRight = box.left + box.right > inWay.left + inWay.right;
+      const right = toRight ? inWay.right - box.left : inWay.left - box.right;
+      moves.set(text, { right, down: 0 });
+      return { ...box, left: box.left + right, right: box.right + right };
+    });
   const placed: { x: number; y: number }[] = [];
   const level = texts
     .filter((text) => !text.upright && text.anchor !== 'middle')
     .sort((a, b) => a.at[1] - b.at[1]);
   for (const text of level) {
-    const start = text.anchor === 'start';
+    const box = wordBox(text, at);
     const [x, y] = [at.x(text.at[0]), at.y(text.at[1])];
-    const width = textWidthPx(text.text);
-    const [left, right] = start ? [x, x + width] : [x - width, x];
-    const inWay = upright.find(
-      (box) =>
-        box.left < right && box.right > left && box.top < y + LINE_PX / 2 && box.bottom > y - LINE_PX / 2,
-    );
-    const aside = inWay === undefined ? 0 : start ? inWay.right - left + 2 : inWay.left - right - 2;
+    const inWay = upright.find((other) => meet(box, other, CLEAR_PX));
+    const aside =
+      inWay === undefined
+        ? 0
+        : text.anchor === 'start'
+          ? inWay.right + CLEAR_PX - box.left
+          : inWay.left - CLEAR_PX - box.right;
     const last = placed.filter((other) => Math.abs(other.x - x) < LINE_PX).at(-1);
     const down = last === undefined ? 0 : Math.max(0, last.y + LINE_PX - y);
     placed.push({ x, y: y + down });
