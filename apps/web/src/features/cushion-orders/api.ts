@@ -14,6 +14,9 @@ export interface OrderPath {
 export const orderAddress = ({ workshopId, productionId, orderId }: OrderPath) =>
   `${productionPath(workshopId, productionId)}/orders/${orderId}`;
 
+/** Mail goes out and answers come in while the page stands open, so it is read again in time. */
+const FOLLOWED = { refetchInterval: 30_000, refetchOnWindowFocus: 'always' } as const;
+
 const orderKey = ({ workshopId, productionId, orderId }: OrderPath) =>
   [...productionKey(workshopId, productionId), 'orders', orderId] as const;
 
@@ -21,6 +24,7 @@ export const useOrder = (path: OrderPath) =>
   useQuery({
     queryKey: orderKey(path),
     queryFn: ({ signal }) => api.get<Order>(orderAddress(path), { signal }),
+    ...FOLLOWED,
   });
 
 export const useMessages = (path: OrderPath, enabled: boolean) =>
@@ -29,7 +33,7 @@ export const useMessages = (path: OrderPath, enabled: boolean) =>
     queryFn: ({ signal }) =>
       api.get<Page<OrderMessage>>(`${orderAddress(path)}/messages`, { signal, query: { pageSize: 200 } }),
     enabled,
-    refetchInterval: 30_000,
+    ...FOLLOWED,
   });
 
 /** Any change to an order; the order, its thread and the list are read again. */
@@ -130,6 +134,7 @@ export const usePublicOrder = (token: string) =>
     queryKey: publicKey(token),
     queryFn: ({ signal }) => api.get<PublicOrder>(publicAddress(token), { signal, anonymous: true }),
     retry: false,
+    ...FOLLOWED,
   });
 
 function usePublicStep<Input>(token: string, step: (input: Input) => Promise<PublicOrder>) {

@@ -32,14 +32,15 @@ const SPEC_KEYS = Object.keys(SPEC_WORDS) as (keyof OrderSpec)[];
 export function ChangeOrderDialog({ path, order, open, onClose }: DialogOfOrder) {
   const change = useChangeOrder(path);
   const [problem, setProblem] = useState<string | null>(null);
-  const values = {
+  // Read once: an order that is read again under the open dialog takes nothing away that was typed.
+  const defaultValues = {
     title: order.title,
     revisionLetter: order.revisionLetter,
     neededBy: order.neededBy ?? '',
     cushionMarks: order.cushionMarks?.join(', ') ?? '',
     ...order.spec,
   };
-  const form = useForm({ values });
+  const form = useForm({ defaultValues });
   const { errors } = form.formState;
   const submit = form.handleSubmit(async ({ title, revisionLetter, neededBy, cushionMarks, ...spec }) => {
     setProblem(null);

@@ -114,6 +114,26 @@ describe('OrderPage', () => {
     expect(dialog.getByLabelText('Cushions')).toHaveValue('C9');
   });
 
+  it('reads the order and the thread again when the window has the focus again', async () => {
+    show(SENT_ORDER);
+    expect(await screen.findByText('The mail could not be sent.')).toBeVisible();
+    const message = {
+      side: 'upholsterer',
+      authorName: 'Odile',
+      text: 'All clear.',
+      at: '2026-02-01T08:00:00Z',
+    };
+    server.use(
+      http.get(AT, () =>
+        HttpResponse.json({ ...SENT_ORDER, lastMail: { ...SENT_ORDER.lastMail, state: 'sent' } }),
+      ),
+      http.get(`${AT}/messages`, () => HttpResponse.json(page([message]))),
+    );
+    window.dispatchEvent(new Event('visibilitychange'));
+    expect(await screen.findByText(/^The mail went out/)).toBeVisible();
+    expect(await screen.findByText('All clear.')).toBeVisible();
+  });
+
   it('offers to send a mail again that did not go out', async () => {
     const user = userEvent.setup();
     let again = 0;

@@ -129,7 +129,8 @@ export function OrderPage({ path }: { path: OrderPath }) {
       </div>
     );
   }
-  if (order.isError) {
+  // An order that was read once stays on the page while the server does not answer.
+  if (order.isError && order.data === undefined) {
     return (
       <div className="page">
         <Notice tone="wont" title="The order cannot be shown">
