@@ -1,3 +1,4 @@
+import { randomUUID } from 'node:crypto';
 import { afterAll, beforeAll, expect, it } from '@jest/globals';
 import { DataSource } from 'typeorm';
 import { dataSourceOptions } from '../src/database/data-source-options';
@@ -31,6 +32,47 @@ it('goes up, all the way down and up again, and then says what the entities say'
   await runMigrations(dataSource);
   expect(await tables()).toEqual(first);
   expect(await pendingChanges()).toEqual([]);
+});
+
+it('gives messages and events written before to the upholsterer who has the order', async () => {
+  const old = await new DataSource(dataSourceOptions(await makeWorkerDatabase('_messages'))).initialize();
+  await runMigrations(old);
+  const upTo = MIGRATIONS.findIndex(({ name }) => name.startsWith('UpholstererOfMessages'));
+  for (let count = MIGRATIONS.length; count > upTo; count -= 1) await old.undoLastMigration();
+  const [firm, order, other] = [randomUUID(), randomUUID(), randomUUID()];
+  await old.transaction(async (manager) => {
+    // What stands around an order matters nothing here.
+    await manager.query('SET LOCAL session_replication_role = replica');
+    await manager.query(
+      `INSERT INTO upholsterers (id, workshop_id, name, contact_name, email, telephone, notes)
+       VALUES ($1, $2, 'Marrow & Tuft', '', '', '', '')`,
+      [firm, other],
+    );
+    await manager.query(
+      `INSERT INTO cushion_orders (id, workshop_id, production_id, set_id, number, revision_letter, title,
+         cushion_count, spec, upholsterer_id, created_by_id)
+       VALUES ($1, $3, $3, $3, 1, 'A', '', 1, '{}', $2, $3)`,
+      [order, firm, other],
+    );
+    await manager.query(
+      `INSERT INTO order_messages (order_id, side, author_name, text) VALUES ($1, 'upholsterer', '', '')`,
+      [order],
+    );
+    for (const kind of ['created', 'sent']) {
+      await manager.query(
+        `INSERT INTO order_events (order_id, kind, side, by_name, revision_letter, note)
+         VALUES ($1, $2, 'workshop', '', 'A', '')`,
+        [order, kind],
+      );
+    }
+  });
+  await runMigrations(old);
+  expect(await old.query('SELECT upholsterer_id FROM order_messages')).toEqual([{ upholsterer_id: firm }]);
+  expect(await old.query('SELECT kind, upholsterer_id FROM order_events ORDER BY kind')).toEqual([
+    { kind: 'created', upholsterer_id: null },
+    { kind: 'sent', upholsterer_id: firm },
+  ]);
+  await old.destroy();
 });
 
 it('keeps migrations in the order of their times', () => {
