@@ -6,7 +6,8 @@ import { frameFor, type Cut, type Insets, type ViewLetter } from '../scene/views
 
 const WIDE: Insets = { top: 74, right: 40, bottom: 56, left: 96 };
 const NARROW: Insets = { top: 62, right: 14, bottom: 30, left: 14 };
-const LOW: Insets = { top: 54, right: 40, bottom: 14, left: 90 };
+/** Below, the paper fades over a fourteenth of the sheet: feet stand above that. */
+const low = (height: number): Insets => ({ top: 54, right: 40, bottom: height * 0.08 + 4, left: 90 });
 const NARROW_PX = 560;
 const LOW_PX = 430;
 
@@ -74,7 +75,7 @@ export function useView(
         letter,
         bounds,
         viewport: size,
-        insets: narrow ? NARROW : size.height < LOW_PX ? LOW : WIDE,
+        insets: narrow ? NARROW : size.height < LOW_PX ? low(size.height) : WIDE,
         cut,
         ...hand,
       }),
