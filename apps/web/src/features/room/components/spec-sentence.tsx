@@ -80,7 +80,7 @@ export function SpecSentence({ piece }: { piece: Piece }) {
   const shared = { piece, slipId, onHand: setHand, onNext: goOn };
   const spoken = hand && hand.pieceId === piece.id ? hand : null;
   return (
-    <div className="ruled grid gap-x-10 gap-y-3 pt-3 desk:grid-cols-[minmax(0,1fr)_13.5rem]">
+    <div className="ruled relative grid gap-x-10 gap-y-3 pt-3 desk:grid-cols-[minmax(0,1fr)_13.5rem]">
       <div ref={sentence} role="group" aria-label={`${piece.name || piece.kind} ${piece.mark} in words`}>
         <p className="text-[1.625rem] leading-[2.625rem] max-tablet:text-[1.3125rem] max-tablet:leading-[2.1875rem]">
           <SpecTokens tokens={main} look="main" {...shared} />
@@ -91,16 +91,19 @@ export function SpecSentence({ piece }: { piece: Piece }) {
           </p>
         )}
       </div>
-      <div className="desk:min-h-[8.25rem]">
+      {/* The slip may be taller than its place: it then lies over the drawing, which must not change scale. */}
+      <div className="desk:relative desk:min-h-[8.25rem]">
         {canEdit && spoken && (
-          <NumberSlip
-            id={slipId}
-            pieceId={spoken.pieceId}
-            parameter={spoken.parameter}
-            reading={spoken.reading}
-            editing={spoken.editing}
-            onTake={spoken.take}
-          />
+          <div className="bg-paper tablet:absolute tablet:right-0 tablet:z-20 tablet:w-[13.5rem] tablet:max-desk:bottom-full tablet:max-desk:py-2 desk:bottom-0 desk:min-h-full">
+            <NumberSlip
+              id={slipId}
+              pieceId={spoken.pieceId}
+              parameter={spoken.parameter}
+              reading={spoken.reading}
+              editing={spoken.editing}
+              onTake={spoken.take}
+            />
+          </div>
         )}
       </div>
     </div>
