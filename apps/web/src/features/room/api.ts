@@ -17,7 +17,8 @@ export interface SetInfo {
   id: string;
   name: string;
   draftNumber: number;
-  lastRevision?: { letter: string; issuedAt: string } | null;
+  /** `number` is that of the draft it was issued from. */
+  lastRevision?: { letter: string; number: number; issuedAt: string } | null;
 }
 
 export interface Approval {

@@ -3,6 +3,7 @@ import { useMemo, useState, type ReactNode } from 'react';
 import { useStore } from 'zustand';
 import { Button } from '@/components/button.tsx';
 import { Notice } from '@/components/notice.tsx';
+import type { SetInfo } from '../api.ts';
 import { useRoomAddress } from '../hooks/use-address.ts';
 import { usePieceActions } from '../hooks/use-piece-actions.ts';
 import { useRoomCells } from '../hooks/use-room-cells.ts';
@@ -22,7 +23,7 @@ import { SceneStage } from './scene-stage.tsx';
 import { SpecSentence } from './spec-sentence.tsx';
 
 interface Props {
-  lastRevision: string | undefined;
+  lastRevision: SetInfo['lastRevision'];
   foot: ReactNode;
   aboutPiece?: (piece: Piece) => ReactNode;
 }
@@ -121,7 +122,7 @@ export function RoomDesk({ lastRevision, foot, aboutPiece }: Props) {
             />
             {!empty && <KeyPlan picture={picture} address={address} />}
             <KnownDifferences document={document} onReplace={actions.replace} />
-            {mayChange && !empty && <IssueRevision sheet={picture.sheet} lastLetter={lastRevision} />}
+            {mayChange && !empty && <IssueRevision sheet={picture.sheet} lastLetter={lastRevision?.letter} />}
             {!clientView && <NotesPanel piece={piece} pieces={document.pieces} parts={picture.parts} />}
             <p>
               <Button look="word" onClick={() => setHelpOpen(true)}>

@@ -20,7 +20,7 @@ export function RoomPage({ path, foot, bandLink, aboutPiece }: RoomSlots & { pat
   return (
     <OpenRoom path={path}>
       <BandLinkContext value={bandLink ?? null}>
-        <RoomDesk lastRevision={info.data?.lastRevision?.letter} foot={foot} aboutPiece={aboutPiece} />
+        <RoomDesk lastRevision={info.data?.lastRevision} foot={foot} aboutPiece={aboutPiece} />
       </BandLinkContext>
     </OpenRoom>
   );

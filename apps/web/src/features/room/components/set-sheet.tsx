@@ -17,7 +17,7 @@ function Frame({ path, children }: Props) {
   const autosave = useAutosave();
   const { save } = useStore(autosave.state);
   const { canEdit } = useSurroundings();
-  useRoomCells(info.data?.lastRevision?.letter, canEdit);
+  useRoomCells(info.data?.lastRevision, canEdit);
   useSavedCell(autosave);
   return save.kind === 'conflict' ? <ConflictScreen conflict={save.conflict} /> : children;
 }

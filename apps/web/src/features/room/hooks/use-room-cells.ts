@@ -4,8 +4,20 @@ import { useTitleCells, type TitleCell } from '@/lib/title-cells.ts';
 import { useAutosave, useSurroundings } from '../room-context.tsx';
 import { useUndo } from '../store.ts';
 
+interface Issued {
+  letter: string;
+  number: number;
+}
+
+export function sayDraft(number: number, last: Issued | null | undefined): string {
+  if (!last) return `${number}, nothing issued`;
+  return number === last.number
+    ? `${number}, as issued in ${last.letter}`
+    : `${number}, after revision ${last.letter}`;
+}
+
 /** The room's cells of the title block: set, draft, undo and redo by name. */
-export function useRoomCells(lastRevision: string | undefined, canEdit: boolean): void {
+export function useRoomCells(lastRevision: Issued | null | undefined, canEdit: boolean): void {
   const { path, setName } = useSurroundings();
   const autosave = useAutosave();
   const number = useStore(autosave.state, (state) => state.base.number);
@@ -33,7 +45,7 @@ export function useRoomCells(lastRevision: string | undefined, canEdit: boolean)
         side: 'left',
         order: 40,
         label: 'Draft',
-        value: lastRevision ? `${number}, after revision ${lastRevision}` : `${number}, nothing issued`,
+        value: sayDraft(number, lastRevision),
         to: `${home}/revisions`,
       },
     ];
