@@ -118,7 +118,10 @@ function possibleOf(
 ): Reading {
   const readings = reading.readings.filter((value) => value >= parameter.min && value <= parameter.max);
   if (readings.length > 0) return { ...reading, readings };
-  const [least, most] = [parameter.min, parameter.max].map((value) => showNumber(parameter, style, value));
+  // Rounded inwards: what is named here can be typed.
+  const step = stepOf(parameter, style);
+  const least = showNumber(parameter, style, Math.ceil(parameter.min / step - 1e-6) * step);
+  const most = showNumber(parameter, style, Math.floor(parameter.max / step + 1e-6) * step);
   return {
     kind: 'unreadable',
     message: `“${text.trim()}” can be read in more than one way, and none is possible here. Type ${least} to ${most}.`,
