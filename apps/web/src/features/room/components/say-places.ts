@@ -1,15 +1,35 @@
-import type { SetDocument } from '@settlewright/geometry';
+import { formatLength, type LengthStyle, type PoseNote, type SetDocument } from '@settlewright/geometry';
 import type { SeatedBody } from '../picture.ts';
 
-/** "Ottilie Brandt sits on B1, place 1; her feet hang 44 mm." */
-export function sayPlaces(document: SetDocument, bodies: readonly SeatedBody[]): string {
+function sayNote({ kind, valueMm = 0 }: PoseNote, style: LengthStyle): string {
+  const size = formatLength(valueMm, style);
+  switch (kind) {
+    case 'feet-hang':
+      return `feet hang ${size}`;
+    case 'slides-forward':
+      return `sits ${size} forward of the back to free the knees; the back is not supported`;
+    case 'knees-lift':
+      return 'the seat is low: the thighs lift off it';
+    case 'forearms-on-table':
+      return 'forearms on the table';
+    case 'hands-on-lap':
+      return 'hands on the lap';
+  }
+}
+
+type Said = Pick<SeatedBody, 'pieceId' | 'placeId' | 'name'> & {
+  pose: Pick<SeatedBody['pose'], 'notes'>;
+};
+
+/** "Ottilie Brandt sits on B1, place 1: feet hang 1¾″, hands on the lap." */
+export function sayPlaces(document: SetDocument, bodies: readonly Said[], style: LengthStyle): string {
   if (bodies.length === 0) return 'Nobody is seated.';
   return bodies
     .map((body) => {
       const mark = document.pieces.find((piece) => piece.id === body.pieceId)?.mark ?? '';
       const place = body.placeId.split(':').at(-1) ?? '';
-      const notes = body.pose.words.length > 0 ? `: ${body.pose.words.join(', ')}` : '';
-      return `${body.name} sits on ${mark}, place ${place}${notes}.`;
+      const words = body.pose.notes.map((note) => sayNote(note, style));
+      return `${body.name} sits on ${mark}, place ${place}${words.length > 0 ? `: ${words.join(', ')}` : ''}.`;
     })
     .join(' ');
 }

@@ -21,8 +21,8 @@ export function TextTwin({ id, picture, tapes, onOpenCell }: Props) {
         {document.pieces.length === 0
           ? 'The set is empty.'
           : `Shows ${document.pieces.map((piece) => `${piece.mark} ${piece.name}`).join(', ')}.`}{' '}
-        {sayPlaces(document, bodies)} Arrow keys move the selected piece, comma and full stop turn it, Delete
-        removes it. Sizes are listed below.
+        {sayPlaces(document, bodies, style)} Arrow keys move the selected piece, comma and full stop turn it,
+        Delete removes it. Sizes are listed below.
       </p>
       {tapes.length > 0 && (
         <ul aria-label="Tapes of the drawing">
