@@ -41,6 +41,7 @@ export function SceneStage({ picture, piece, address, actions, onOpenCell }: Pro
   const theme = useTheme((state) => state.choice);
   const lit = useRoom((state) => state.litCellId);
   const sheet = useRef<HTMLDivElement>(null);
+  const readOut = useRef<HTMLDivElement>(null);
   const about = useId();
   const [showBodies, setShowBodies] = useState(true);
   const [showTapes, setShowTapes] = useState(true);
@@ -53,6 +54,7 @@ export function SceneStage({ picture, piece, address, actions, onOpenCell }: Pro
     letter,
     selectedPieceId: address.pieceId,
     onSelect: address.select,
+    readOut,
   });
 
   const tapes = useMemo(
@@ -145,6 +147,12 @@ export function SceneStage({ picture, piece, address, actions, onOpenCell }: Pro
           selectedPieceId={address.pieceId}
           onSelectPiece={address.select}
           onOpenCell={onOpenCell}
+        />
+        <div
+          ref={readOut}
+          hidden
+          aria-hidden="true"
+          className="pointer-events-none absolute top-0 left-0 z-20 rounded-sm bg-ink px-2 text-sm leading-6 whitespace-nowrap text-paper"
         />
         {isToScale(letter) && <ScaleBar controller={view.controller} style={style} />}
       </div>

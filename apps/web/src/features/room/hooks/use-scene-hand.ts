@@ -1,7 +1,8 @@
-import { movePiece, snapPiece, type Piece, type SetDocument } from '@settlewright/geometry';
-import { useEffect, useRef, type PointerEvent } from 'react';
+import { movePiece, snapPiece, type Piece, type SetDocument, type Snapped } from '@settlewright/geometry';
+import { useEffect, useRef, type PointerEvent, type RefObject } from 'react';
 import { announce } from '@/lib/announce.ts';
 import type { RoomPicture } from '../picture.ts';
+import { nameMove, readOutMove } from '../move-words.ts';
 import { useSurroundings } from '../room-context.tsx';
 import { onLevel, pieceUnder } from '../scene/pick.ts';
 import { turn } from '../scene/vectors.ts';
@@ -26,6 +27,7 @@ interface Drag {
   onPaper: boolean;
   base: SetDocument;
   floor: { xMm: number; zMm: number } | undefined;
+  snapped?: Snapped;
 }
 
 /** Clicking, dragging pieces over the floor, and moving the sheet: kept out of React until let go. */
@@ -35,10 +37,12 @@ export function useSceneHand(options: {
   letter: ViewLetter;
   selectedPieceId: string | undefined;
   onSelect: (pieceId: string | undefined) => void;
+  /** Stands near the pointer while a piece is dragged. */
+  readOut: RefObject<HTMLDivElement | null>;
 }) {
-  const { picture, view, letter, selectedPieceId, onSelect } = options;
+  const { picture, view, letter, selectedPieceId, onSelect, readOut } = options;
   const store = useRoomStore();
-  const { canEdit } = useSurroundings();
+  const { canEdit, style } = useSurroundings();
   const drag = useRef<Drag | null>(null);
   const wanted = useRef<SetDocument | null>(null);
   const request = useRef(0);
@@ -110,8 +114,10 @@ export function useSceneHand(options: {
       if (!by) return;
       const { piece, base } = hand;
       const to = { xMm: piece.at.xMm + by.x, zMm: piece.at.zMm + by.z, turnDeg: piece.at.turnDeg };
-      const snapped = event.altKey ? to : snapPiece(base, piece.id, to).at;
-      wanted.current = movePiece(base, piece.id, snapped);
+      const snapped: Snapped = event.altKey ? { at: to } : snapPiece(base, piece.id, to);
+      wanted.current = movePiece(base, piece.id, snapped.at);
+      hand.snapped = snapped;
+      showReadOut(readOutMove(piece.at, snapped.at, snapped.snappedTo, style), x, y);
       cancelAnimationFrame(request.current);
       request.current = requestAnimationFrame(() => store.getState().showPreview(wanted.current));
     } else if (letter === 'E') {
@@ -123,13 +129,32 @@ export function useSceneHand(options: {
     hand.lastY = y;
   }
 
+  function showReadOut(words: string, x: number, y: number) {
+    const element = readOut.current;
+    if (!element) return;
+    element.textContent = words;
+    element.hidden = false;
+    const room = (element.parentElement?.clientWidth ?? 0) - element.offsetWidth - 4;
+    element.style.transform = `translate(${Math.max(4, Math.min(x + 14, room))}px, ${Math.max(4, y - 34)}px)`;
+  }
+
+  function hideReadOut() {
+    if (readOut.current) readOut.current.hidden = true;
+  }
+
   function end() {
     cancelAnimationFrame(request.current);
     const hand = drag.current;
     drag.current = null;
-    if (hand?.piece && hand.moving && wanted.current) {
-      store.getState().commit(wanted.current, `${hand.piece.mark} moved`);
-      announce(`${hand.piece.mark} moved`);
+    hideReadOut();
+    if (hand?.piece && hand.moving && hand.snapped && wanted.current) {
+      const { piece, snapped } = hand;
+      const step = nameMove(piece.mark, piece.at, snapped.at, style);
+      if (step === undefined) store.getState().showPreview(null);
+      else {
+        store.getState().commit(wanted.current, step);
+        announce(snapped.snappedTo ? `${step}, ${snapped.snappedTo}` : step);
+      }
     }
     if (hand?.onPaper && !hand.moving) onSelect(undefined);
     wanted.current = null;
@@ -137,6 +162,7 @@ export function useSceneHand(options: {
 
   function cancel() {
     cancelAnimationFrame(request.current);
+    hideReadOut();
     if (drag.current?.piece) store.getState().showPreview(null);
     drag.current = null;
     wanted.current = null;
