@@ -1,4 +1,12 @@
-import { placeFrames, type Piece, type SetDocument } from '@settlewright/geometry';
+import {
+  formatLength,
+  placeFrames,
+  setParameter,
+  snapToBoards,
+  type LengthStyle,
+  type Piece,
+  type SetDocument,
+} from '@settlewright/geometry';
 import { useState } from 'react';
 import { Button } from '@/components/button.tsx';
 import { Menu } from '@/components/menu.tsx';
@@ -16,7 +24,7 @@ interface Props {
 
 /** What the row of the selected piece opens: who sits there, and what can be done. */
 export function PieceDetails({ piece, document, actions }: Props) {
-  const { cast, canEdit } = useSurroundings();
+  const { cast, canEdit, style } = useSurroundings();
   const [open, setOpen] = useState<'numbers' | 'places' | null>(null);
   const frames = placeFrames(piece, document);
   const seated = document.seating
@@ -48,7 +56,7 @@ export function PieceDetails({ piece, document, actions }: Props) {
             name={`More of ${piece.mark}, menu`}
             button="More"
             buttonClassName="link min-h-6"
-            entries={moreEntries(piece, document, actions)}
+            entries={moreEntries(piece, document, actions, style)}
           />
         )}
       </p>
@@ -69,19 +77,47 @@ export function PieceDetails({ piece, document, actions }: Props) {
   );
 }
 
-function moreEntries(piece: Piece, document: SetDocument, actions: PieceActions) {
+const LINES = [
+  { edge: 'back', words: 'at the back' },
+  { edge: 'front', words: 'at the front' },
+  { edge: 'left', words: 'on the left' },
+  { edge: 'right', words: 'on the right' },
+] as const;
+
+/** The nearest length of whole boards, for a piece that is built of them and is not that long already. */
+function boardEntries(piece: Piece, document: SetDocument, actions: PieceActions, style: LengthStyle) {
+  if (piece.kind !== 'bench' && piece.kind !== 'bulkhead') return [];
+  const { lengthMm, boards } = snapToBoards(piece.lengthMm, piece.boards);
+  if (Math.abs(lengthMm - piece.lengthMm) < 0.05) return [];
+  const words = `${boards} boards long`;
+  return [
+    {
+      id: 'boards',
+      words: `Make it ${words}`,
+      detail: formatLength(lengthMm, { ...style, feet: true }),
+      disabled: piece.locked,
+      onPress: () => {
+        const changed = setParameter(document, piece.id, 'lengthMm', lengthMm);
+        if (changed.ok) actions.replace(changed.value, `${piece.mark} ${words}`);
+      },
+    },
+  ];
+}
+
+function moreEntries(piece: Piece, document: SetDocument, actions: PieceActions, style: LengthStyle) {
   const like = document.pieces.filter((other) => other.kind === piece.kind).map((other) => other.id);
   const ids = [piece.id, ...like.filter((id) => id !== piece.id)];
   return [
     { id: 'copy', words: 'Copy', onPress: () => actions.duplicate(piece) },
     { id: 'left', words: 'Turn 15° left', disabled: piece.locked, onPress: () => actions.turn(piece, 15) },
     { id: 'right', words: 'Turn 15° right', disabled: piece.locked, onPress: () => actions.turn(piece, -15) },
-    {
-      id: 'align-back',
-      words: `Line up all of its kind at the back`,
+    ...boardEntries(piece, document, actions, style),
+    ...LINES.map(({ edge, words }) => ({
+      id: `align-${edge}`,
+      words: `Line up all of its kind ${words}`,
       disabled: ids.length < 2,
-      onPress: () => actions.align(ids, 'back'),
-    },
+      onPress: () => actions.align(ids, edge),
+    })),
     {
       id: 'lock',
       words: piece.locked ? 'Unlock its place' : 'Lock its place',
