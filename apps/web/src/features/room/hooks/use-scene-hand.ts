@@ -132,14 +132,17 @@ export function useSceneHand(options: {
   function showReadOut(words: string, x: number, y: number) {
     const element = readOut.current;
     if (!element) return;
-    element.textContent = words;
-    element.hidden = false;
+    element.replaceChildren(words);
+    element.toggleAttribute('hidden', false);
     const room = (element.parentElement?.clientWidth ?? 0) - element.offsetWidth - 4;
-    element.style.transform = `translate(${Math.max(4, Math.min(x + 14, room))}px, ${Math.max(4, y - 34)}px)`;
+    element.style.setProperty(
+      'transform',
+      `translate(${Math.max(4, Math.min(x + 14, room))}px, ${Math.max(4, y - 34)}px)`,
+    );
   }
 
   function hideReadOut() {
-    if (readOut.current) readOut.current.hidden = true;
+    readOut.current?.toggleAttribute('hidden', true);
   }
 
   function end() {
