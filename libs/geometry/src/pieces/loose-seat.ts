@@ -109,7 +109,7 @@ export const LOOSE_SEAT: PieceDefinition<'loose-seat'> = {
   },
   sentence: (seat) => ({
     main: sentenceOf(
-      `${seat.backHeightMm > 0 ? 'Chair' : 'Stool'} ${seat.mark}, seat `,
+      `Loose seat ${seat.mark}, seat `,
       ['pressedSeatHeight', 'Seat height'],
       ' off the floor with the cushion pressed, ',
       ['widthMm', 'Width'],

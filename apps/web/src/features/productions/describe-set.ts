@@ -24,7 +24,7 @@ export function numberWord(count: number): string {
 const KINDS: readonly { kind: PieceKind; one: string; many: string }[] = [
   { kind: 'bench', one: 'bench', many: 'benches' },
   { kind: 'table', one: 'table', many: 'tables' },
-  { kind: 'loose-seat', one: 'chair', many: 'chairs' },
+  { kind: 'loose-seat', one: 'loose seat', many: 'loose seats' },
   { kind: 'sill', one: 'sill', many: 'sills' },
   { kind: 'overhead', one: 'beam', many: 'beams' },
 ];

@@ -22,7 +22,7 @@ import { changedVerdicts } from '../verdict-words.ts';
 export const KIND_WORDS: Record<PieceKind, string> = {
   bench: 'bench',
   table: 'table',
-  'loose-seat': 'chair or stool',
+  'loose-seat': 'loose seat',
   sill: 'window sill',
   bulkhead: 'bulkhead',
   overhead: 'beam or soffit',
