@@ -20,6 +20,7 @@ import { findOrder, lockOrder, type OrderPlace } from './order-access';
 import { contentOf } from './order-content';
 import { makeLink, revokeLinks } from './order-links';
 import {
+  lastLetter,
   type OrderLetter,
   orderMail,
   OUTGOING_KINDS,
@@ -167,17 +168,7 @@ export class OrderCorrespondence {
     const { sent, upholsterer: earlier } = order;
     if (!sent || !earlier || earlier.removedAt !== null) return;
     const workshop = await this.workshops.get(order.workshopId, manager);
-    const mail = withdrawnMail({
-      workshopName: workshop.name,
-      workshopTelephone: workshop.telephone,
-      senderName: sender.name,
-      senderEmail: sender.email,
-      upholstererName: earlier.name,
-      upholstererEmail: earlier.email,
-      contactName: earlier.contactName,
-      number: order.number,
-      title: sent.title,
-    });
+    const mail = withdrawnMail(lastLetter(workshop, sender, earlier, { ...order, title: sent.title }));
     await this.post(manager, order, mail);
   }
 

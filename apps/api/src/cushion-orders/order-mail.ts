@@ -127,6 +127,25 @@ type LastLetter = Omit<
   'linkUrl' | 'linkExpires' | 'message' | 'revisionLetter' | 'neededBy' | 'cushionCount'
 >;
 
+export function lastLetter(
+  workshop: { name: string; telephone: string },
+  sender: { name: string; email: string },
+  told: { name: string; email: string; contactName: string },
+  { number, title }: { number: number; title: string },
+): LastLetter {
+  return {
+    workshopName: workshop.name,
+    workshopTelephone: workshop.telephone,
+    senderName: sender.name,
+    senderEmail: sender.email,
+    upholstererName: told.name,
+    upholstererEmail: told.email,
+    contactName: told.contactName,
+    number,
+    title,
+  };
+}
+
 /** That an order is called off. */
 export function cancelledMail(letter: LastLetter): MailToSend {
   return lastMail(letter, 'cushion-order-cancelled', 'is cancelled');

@@ -11,7 +11,7 @@ import type { CushionOrder } from './entities/cushion-order.entity';
 import { acknowledgementOf } from './link.service';
 import { findOrder, lockOrder, type OrderPlace } from './order-access';
 import { sameContent } from './order-content';
-import { cancelledMail } from './order-mail';
+import { cancelledMail, lastLetter } from './order-mail';
 import { recordEvent } from './order-record';
 import { mayFollow, type RecordedState, recordableAfter, STATE_WORDS } from './order-states';
 
@@ -58,17 +58,7 @@ export class OrderProgress {
       const told = order.upholsterer;
       if (to === 'cancelled' && from !== 'draft' && order.sent && told && told.removedAt === null) {
         const workshop = await this.workshops.get(order.workshopId, manager);
-        const mail = cancelledMail({
-          workshopName: workshop.name,
-          workshopTelephone: workshop.telephone,
-          senderName: author.name,
-          senderEmail: author.email,
-          upholstererName: told.name,
-          upholstererEmail: told.email,
-          contactName: told.contactName,
-          number: order.number,
-          title: order.sent.title,
-        });
+        const mail = cancelledMail(lastLetter(workshop, author, told, { ...order, title: order.sent.title }));
         await this.mail.enqueue(manager, { ...mail, workshopId: order.workshopId, relatedId: order.id });
       }
       return findOrder(manager, place);
