@@ -241,7 +241,10 @@ describe('sitting down', () => {
 
   it('hangs by what the seat is higher than popliteal height and shoe', () => {
     expect(stand(man.popliteal_height! + 25 + 60).heelGapMm).toBeCloseTo(60, 6);
-    expect(stand(man.popliteal_height! + 25 + 60).words[0]).toBe('feet hang 60 mm');
+    expect(stand(man.popliteal_height! + 25 + 60).notes[0]).toEqual({
+      kind: 'feet-hang',
+      valueMm: expect.closeTo(60, 6),
+    });
     expect(stand(man.popliteal_height! + 25).heelGapMm).toBeCloseTo(0, 6);
   });
 

@@ -42,8 +42,6 @@ export interface MannequinPose {
   /** Simple solids along the body, room frame, for distances and quick drawings. */
   segments: MannequinSegment[];
   notes: PoseNote[];
-  /** The notes in words, millimetres. */
-  words: string[];
   /** Top of the head above the floor. */
   headTopMm: number;
   /** Eye above the floor. */
@@ -99,22 +97,6 @@ function legsFor(f: Figure, placement: BodyPlacement, shoeMm: number): Legs {
     kneesLift: true,
   };
 }
-
-const inWords = (note: PoseNote): string => {
-  const size = `${Math.round(note.valueMm ?? 0)} mm`;
-  switch (note.kind) {
-    case 'feet-hang':
-      return `feet hang ${size}`;
-    case 'slides-forward':
-      return `sits ${size} forward of the back to free the knees; the back is not supported`;
-    case 'knees-lift':
-      return 'the seat is low: the thighs lift off it';
-    case 'forearms-on-table':
-      return 'forearms on the table';
-    case 'hands-on-lap':
-      return 'hands on the lap';
-  }
-};
 
 /**
  * Seats a body at a place: pelvis on the pressed seat with the buttock against the back, unless the seat
@@ -176,7 +158,6 @@ export function poseMannequin(input: {
     joints,
     segments: bodySegments(f, joints, placement),
     notes,
-    words: notes.map(inWords),
     headTopMm: joints.crown[1],
     eyeMm: joints.eye[1],
     heelGapMm: legs.heelGapMm,
