@@ -10,6 +10,7 @@ import { download } from '@/lib/download.ts';
 import { sayProblem } from '@/lib/problem.ts';
 import type { RowOrder } from '../columns.ts';
 import { useFitView } from '../fit-view.ts';
+import { CountedApart } from './counted-apart.tsx';
 import { FitGrid } from './fit-grid.tsx';
 import { FitCaution, FitKey } from './fit-key.tsx';
 import { FitPeople } from './fit-people.tsx';
@@ -41,7 +42,12 @@ export function FitPage({ roomTo, papersAt }: FitPageProps) {
     <div className="page">
       <PageHeading
         title="Fit sheet"
-        below={<VerdictCounts counts={sheet.counts} className="mt-2 text-lg" />}
+        below={
+          <>
+            <VerdictCounts counts={sheet.counts} className="mt-2 text-lg" />
+            <CountedApart className="mt-1 text-sm text-ink-2" />
+          </>
+        }
         actions={
           <>
             <Button onClick={() => fetchPaper('pdf')}>Print, PDF</Button>

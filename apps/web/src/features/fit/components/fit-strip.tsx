@@ -3,6 +3,7 @@ import { SitterDot } from '@/components/sitter-dot.tsx';
 import { Verdict, VerdictCounts } from '@/components/verdict.tsx';
 import { checkName, shortName } from '../amounts.ts';
 import { useFitView } from '../fit-view.ts';
+import { CountedApart } from './counted-apart.tsx';
 
 function WorstOf({ row }: { row: SitterRow }) {
   const { ruleBook } = useFitView();
@@ -56,7 +57,10 @@ export function FitStrip({ onOpen }: { onOpen: () => void }) {
           </li>
         ))}
       </ul>
-      <VerdictCounts counts={sheet.counts} className="text-sm tablet:hidden" />
+      <div className="min-w-0 text-sm max-tablet:py-1.5">
+        <VerdictCounts counts={sheet.counts} className="tablet:hidden" />
+        <CountedApart className="text-xs text-ink-2 tablet:max-w-56 tablet:max-desk:hidden" />
+      </div>
     </>
   );
 }
