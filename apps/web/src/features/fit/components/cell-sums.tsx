@@ -43,7 +43,7 @@ function MarginLine({ outcome, ruleId, sum }: Props & { sum: MarginSum | undefin
   const { unit } = ruleBook.rule(ruleId);
   const show = (value: number) => <Measure text={amountText(value, unit, style)} />;
   return (
-    <div className="flex flex-wrap items-baseline justify-between gap-x-6 border-t border-ink pt-2">
+    <div className="flex flex-wrap items-baseline justify-between gap-x-6 border-b border-ink pb-1">
       <Verdict verdict={outcome.verdict} estimated={outcome.estimated} className="whitespace-nowrap" />
       <p className="text-lg font-light whitespace-nowrap">
         {sum && (
@@ -78,11 +78,11 @@ export function Sums({ outcome, ruleId }: Props) {
   const [value, line] = valueFirst ? [sum?.from, sum?.take] : [sum?.take, sum?.from];
   return (
     <div className="grid content-start gap-3">
+      <MarginLine outcome={outcome} ruleId={ruleId} sum={sum} />
       <div className="grid grid-cols-2 items-start gap-6 max-phone:grid-cols-1 max-phone:gap-3">
         <Ledger caption="The body" lines={outcome.bodyLedger} unit={unit} closesTo={line} />
         <Ledger caption="The set" lines={outcome.setLedger} unit={unit} closesTo={value} />
       </div>
-      <MarginLine outcome={outcome} ruleId={ruleId} sum={sum} />
       <LimitWords outcome={outcome} ruleId={ruleId} />
     </div>
   );

@@ -1,6 +1,6 @@
 import type { FitCell, FitSheet } from '@settlewright/anthropometry';
 import { setParameter, type Fix } from '@settlewright/geometry';
-import { act, screen, within } from '@testing-library/react';
+import { act, fireEvent, screen, within } from '@testing-library/react';
 import userEvent from '@testing-library/user-event';
 import { describe, expect, it, vi } from 'vitest';
 import { check, facingBenches, sheet, showSheet } from '../test/show-sheet.tsx';
@@ -85,7 +85,7 @@ describe('the slip of a cell', () => {
     expect(inSlip.getByRole('table', { name: 'The set' })).toHaveTextContent(
       /\+ cushion.*− sinks under Hetty/,
     );
-    expect(slip()).toHaveTextContent(/″ − .*″ = −/);
+    expect(slip()).toHaveTextContent(/^won’t fit.*″ − .*″ = −.*Back of knee/);
     expect(inSlip.getByText(/crook of Hetty Vance’s knee/)).toBeVisible();
     expect(inSlip.getByText(/Rule SEAT-02, from memory\. Coefficients/)).toBeVisible();
     expect(inSlip.getByText('What would change it, and for whom')).toBeVisible();
@@ -152,6 +152,20 @@ describe('the slip of a cell', () => {
     await user.click(seatHeight(/^Marcus/));
     expect(screen.getByRole('region')).not.toHaveTextContent(/\b0 in 100|NaN/);
   });
+});
+
+it('shades its right edge as long as columns stand behind it', () => {
+  const wide = vi.spyOn(Element.prototype, 'scrollWidth', 'get').mockReturnValue(900);
+  const box = vi.spyOn(Element.prototype, 'clientWidth', 'get').mockReturnValue(600);
+  const { container } = showSheet(<FitGrid ground="paper" />);
+  const shade = () => container.querySelector('[data-more-at-right]');
+  expect(shade()).not.toBeNull();
+  const scroller = screen.getByRole('grid').parentElement ?? document.body;
+  scroller.scrollLeft = 300;
+  fireEvent.scroll(scroller);
+  expect(shade()).toBeNull();
+  wide.mockRestore();
+  box.mockRestore();
 });
 
 it('washes the ground of a cell whose verdict a change has turned, for two seconds', () => {
