@@ -5,7 +5,7 @@ import { foamText, otherSystem, runText, sizeTexts, toleranceText } from './size
 const MM: LengthStyle = { system: 'millimetres', roundTo: 8 };
 const INCHES: LengthStyle = { system: 'feet-inches', roundTo: 8 };
 const plain = (text: string) => text.replaceAll('\u202f', ' ');
-const FOAM = { grade: 'HR', densityKgM3: 40, ifd25N: 160 };
+const FOAM = { grade: 'HR', densityKgM3: 40, ifd25N: 160, supportFactor: 2.6 };
 
 describe('what an upholsterer reads beside a size', () => {
   it('follows the units of the page', () => {
