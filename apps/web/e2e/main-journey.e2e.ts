@@ -154,8 +154,10 @@ describe('a set from the first account to the upholsterer’s answer', () => {
       page.waitForEvent('download'),
       say('button', 'Drawing pack, PDF').click(),
     ]);
-    const text = execFileSync('pdftotext', ['-layout', await file.path(), '-'], { encoding: 'utf8' });
-    const finished = await page.getByText(/^Finished, seam to seam/).allTextContents();
+    // Page and paper part a number from its unit with spaces of different widths.
+    const plain = (words: string) => words.replace(/[\s\u202f]+/gu, ' ');
+    const text = plain(execFileSync('pdftotext', ['-layout', await file.path(), '-'], { encoding: 'utf8' }));
+    const finished = (await page.getByText(/^Finished, seam to seam/).allTextContents()).map(plain);
     expect(finished.length).toBeGreaterThan(0);
     for (const line of finished) {
       const size = /\d+ × \d+ × \d+ mm/.exec(line)?.[0];

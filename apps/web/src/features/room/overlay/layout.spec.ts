@@ -83,4 +83,10 @@ describe('the tape itself', () => {
     // Line, two ends and nine inner ticks of a ten inch tape.
     expect(placed && tapePath(placed, 254, 25.4).split('M').length - 1).toBe(12);
   });
+
+  it('draws nothing for a tape that the view cannot place', () => {
+    const nowhere = { x: NaN, y: NaN };
+    const placed = { id: 't', x: 0, y: 0, from: nowhere, to: nowhere };
+    expect(tapePath(placed, 254, 25.4)).toBe('');
+  });
 });

@@ -189,7 +189,8 @@ export function placeFlags(
 export function tapePath(placed: PlacedFlag, lengthMm: number, tickMm: number): string {
   const { from, to } = placed;
   const length = Math.hypot(to.x - from.x, to.y - from.y);
-  if (length < 1) return '';
+  // Also false for a point that the view cannot place, as on a sheet without height.
+  if (!(length >= 1)) return '';
   const [ux, uy] = [(to.x - from.x) / length, (to.y - from.y) / length];
   const [nx, ny] = [-uy, ux];
   const point = (along: number, side: number) =>
