@@ -85,7 +85,7 @@ describe('the tape itself', () => {
   });
 
   it('draws nothing for a tape that the view cannot place', () => {
-    const nowhere = { x: NaN, y: NaN };
+    const nowhere = { x: NaN, y: NaN, depth: 0 };
     const placed = { id: 't', x: 0, y: 0, from: nowhere, to: nowhere };
     expect(tapePath(placed, 254, 25.4)).toBe('');
   });
