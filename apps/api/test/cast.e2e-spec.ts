@@ -212,7 +212,7 @@ describe('cast', () => {
   it.each([
     [{ csv: '' }, 400, 'csv-empty'],
     [{ csv: 'GIF89a\u0000\u0001' }, 400, 'csv-not-text'],
-    [{ csv: 'lorem ipsum' }, 400, 'csv-no-name'],
+    [{ csv: 'plain words' }, 400, 'csv-no-name'],
     [{ csv: 12 }, 400, 'invalid-request'],
     [{}, 400, 'invalid-request'],
     [{ csv: `name\n${'Somebody With A Name\n'.repeat(100_000)}` }, 413, 'csv-too-large'],
