@@ -1,4 +1,5 @@
 import type { BodyModel } from '../people/body-model.ts';
+import { best } from './amount.ts';
 import type {
   FitCell,
   FitSheet,
@@ -112,8 +113,14 @@ interface Answered {
 
 /** Judges what a rule said; of several answers the one with the least room stands. */
 function answered(said: Said, judgement: Judgement): Answered {
-  if ('reason' in said) return { outcome: { kind: 'doesNotApply', reason: said.reason }, pieces: [] };
-  if ('information' in said) return { outcome: { kind: 'information', ...said.information }, pieces: [] };
+  if ('reason' in said) {
+    const { kind = 'doesNotApply', reason } = said;
+    return { outcome: { kind, reason }, pieces: [] };
+  }
+  if ('information' in said) {
+    const { value, words } = said.information;
+    return { outcome: { kind: 'information', value: best(value), words }, pieces: [] };
+  }
   const [{ answer, finding }] = worstFirst(said, judgement);
   const { question, pieces = [], side } = answer;
   return {

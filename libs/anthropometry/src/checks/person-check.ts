@@ -36,9 +36,13 @@ export interface Answer {
 }
 
 /** What a rule has to say at a place. Of several answers the worse is shown. */
-export type Said = Answer[] | { reason: string } | { information: { value: number; words: string } };
+export type Said =
+  Answer[] | { reason: string; kind?: 'notAsked' } | { information: { value: Amount; words: string } };
 
-/** A rule of scope `person`. */
+/**
+ * A rule of scope `person`. What `ask` says never hangs on best values of the body: it is made of amounts, so that it
+ * can be asked once of a stand-in and then judged for any number of bodies. The sums that are shown are made later.
+ */
 export interface PersonCheck {
   /** Rule for a sitter. */
   id: string;

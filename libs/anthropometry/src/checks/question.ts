@@ -1,6 +1,6 @@
 import { best, fixed, plus, type Amount } from './amount.ts';
 import type { LedgerLine } from './fit-sheet.ts';
-import type { Question } from './verdict.ts';
+import { failLines, type Question } from './verdict.ts';
 
 /** One named part of a sum. */
 export type Entry = readonly [label: string, amount: Amount];
@@ -58,7 +58,7 @@ export function question(asked: {
     setLedger,
     bodyLedger: (side) => {
       const lines = side === 'lower' ? lower : upper;
-      return lines ? sideLedger(lines) : [];
+      return lines ? sideLedger(lines, failLines(question)[side] !== question.pass[side]) : [];
     },
   };
   if (lower) {
@@ -75,8 +75,8 @@ export function question(asked: {
 const failOf = ({ further, fail }: Side, pass: Amount): Amount =>
   fail ? sumOf(fail) : further ? plus(pass, sumOf(further)) : pass;
 
-function sideLedger(side: Side): LedgerLine[] {
-  if (!side.further && !side.fail) return ledgerOf(side.pass, 'pass and fail line');
+function sideLedger(side: Side, ownFailLine: boolean): LedgerLine[] {
+  if (!ownFailLine) return ledgerOf(side.pass, 'pass and fail line');
   return [
     ...ledgerOf(side.pass, 'pass line'),
     ...terms(side.fail ?? side.further ?? []),

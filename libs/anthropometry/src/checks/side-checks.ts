@@ -1,4 +1,4 @@
-import { best, fixed, minus, moved, ofBody, plus, times } from './amount.ts';
+import { fixed, minus, moved, ofBody, plus, times } from './amount.ts';
 import {
   clothingOf,
   measureEntry,
@@ -70,7 +70,7 @@ export const elbowToSill: PersonCheck = {
 function shoulderOver(asked: Asked, sill: SillSituation): Said {
   const { height } = pressedSeat(asked, 'hip');
   const over = moved(plus(height, ofBody(asked.body, 'acromial_height_sitting')), -sill.topMm);
-  return { information: { value: best(over), words: `shoulder over ${sill.mark}, the sill behind` } };
+  return { information: { value: over, words: `shoulder over ${sill.mark}, the sill behind` } };
 }
 
 /**

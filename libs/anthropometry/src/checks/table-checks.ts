@@ -140,14 +140,18 @@ export const publicSides = ({ rule }: Asked): { lower: Side; upper: Side } => ({
  */
 export const bellyRoom: PersonCheck = {
   id: 'TABLE-06',
-  ask: (asked) => bellyAnswer(asked, ruleNumber(asked.rule, 'passAllowance')),
-  askPublic(asked) {
-    const belly = asked.body.mean('abdominal_extension_depth_sitting');
-    return bellyAnswer(asked, ruleNumber(asked.rule, 'publicPass') - belly);
-  },
+  ask: (asked) => bellyAnswer(asked, fixed(ruleNumber(asked.rule, 'passAllowance'))),
+  askPublic: (asked) =>
+    bellyAnswer(
+      asked,
+      minus(
+        fixed(ruleNumber(asked.rule, 'publicPass')),
+        ofBody(asked.body, 'abdominal_extension_depth_sitting'),
+      ),
+    ),
 };
 
-const bellyAnswer = (asked: Asked, passAllowance: number): Said =>
+const bellyAnswer = (asked: Asked, passAllowance: Amount): Said =>
   withTable(asked, (table) => {
     const { place, rule, body } = asked;
     const entries: Entry[] = [
@@ -158,11 +162,8 @@ const bellyAnswer = (asked: Asked, passAllowance: number): Said =>
       value: fixed(place.effectiveDepthMm - table.overlapMm),
       setLedger: () => ledgerOf(entries, 'back to table edge'),
       lower: {
-        pass: [
-          measureEntry(body, 'abdominal_extension_depth_sitting'),
-          ['room to move', fixed(passAllowance)],
-        ],
-        further: allowance(ruleNumber(rule, 'failAllowance') - passAllowance),
+        pass: [measureEntry(body, 'abdominal_extension_depth_sitting'), ['room to move', passAllowance]],
+        further: [['allowance for tight', minus(fixed(ruleNumber(rule, 'failAllowance')), passAllowance)]],
       },
     });
   });

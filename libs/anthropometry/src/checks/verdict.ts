@@ -37,6 +37,20 @@ interface Finding extends Pick<
 }
 
 /**
+ * The fail lines that count: a fail line is never stricter than its pass line. A small sitter's own pass line may lie
+ * beyond a fail line that is a plain number; then the two are one.
+ *
+ * @param question - lines in the rule's unit
+ * @returns the fail lines, each side the rule's or the pass line
+ */
+export function failLines({ pass, fail }: Pick<Question, 'pass' | 'fail'>): Band {
+  const band: Band = {};
+  if (fail.lower) band.lower = pass.lower && best(fail.lower) > best(pass.lower) ? pass.lower : fail.lower;
+  if (fail.upper) band.upper = pass.upper && best(fail.upper) < best(pass.upper) ? pass.upper : fail.upper;
+  return band;
+}
+
+/**
  * Judges one question: the value against its lines, for all that is not known of the sitter.
  *
  * Fits when the value keeps within the pass lines with at least the asked probability; won't fit when it lies beyond
@@ -48,8 +62,9 @@ interface Finding extends Pick<
  */
 export function find(question: Question, judgement: Judgement): Finding {
   const predicted = predictedIn(question);
+  const failBand = failLines(question);
   const pass = linesOf(question.pass);
-  const fail = linesOf(question.fail);
+  const fail = linesOf(failBand);
   const value = best(question.value);
   const toLower = fail.lower === undefined ? Infinity : value - fail.lower;
   const toUpper = fail.upper === undefined ? Infinity : fail.upper - value;
@@ -62,8 +77,7 @@ export function find(question: Question, judgement: Judgement): Finding {
     probability = { pass: insidePass, insideFail };
   } else {
     const passRooms = roomWithin(question.value, question.pass);
-    const failRooms =
-      roomMoved(passRooms, question.pass, question.fail) ?? roomWithin(question.value, question.fail);
+    const failRooms = roomMoved(passRooms, question.pass, failBand) ?? roomWithin(question.value, failBand);
     const insidePass = probabilityOfRoom(passRooms, -judgement.tolerance);
     const insideFail = Math.max(insidePass, probabilityOfRoom(failRooms, -judgement.tolerance));
     probability = { pass: insidePass, insideFail };
@@ -157,7 +171,7 @@ function mostUseful(
   side: 'lower' | 'upper',
   predicted: readonly PredictedMeasure[],
 ): MeasureKey[] {
-  const line = question.fail[side] ?? question.pass[side];
+  const line = failLines(question)[side] ?? question.pass[side];
   if (!line) return [];
   const margin = minus(question.value, line);
   const shares = new Map<MeasureKey, number>();
