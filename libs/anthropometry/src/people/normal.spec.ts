@@ -1,5 +1,6 @@
 import fc from 'fast-check';
 import { describe, expect, it } from 'vitest';
+import { outsideCheck } from '../../test/outside-check.ts';
 import { bivariateNormalCdf } from './bivariate.ts';
 import { normalCdf, normalQuantile } from './normal.ts';
 
@@ -53,8 +54,12 @@ describe('bivariateNormalCdf', () => {
     [1, 0.9, 0.95],
   ])('two measures correlated by %f', (correlation, bothWithin, bothBelow) => {
     const f = (h: number, k: number) => bivariateNormalCdf(h, k, correlation);
-    expect(f(z, z) - f(z, -z) - f(-z, z) + f(-z, -z)).toBeCloseTo(bothWithin, 4);
-    expect(f(z, z)).toBeCloseTo(bothBelow, 4);
+    const within = f(z, z) - f(z, -z) - f(-z, z) + f(-z, -z);
+    const source = 'bivariate normal distribution, tabled';
+    const both = { source, tolerance: 0.0001, unit: '' as const };
+    const what = `two measures correlated by ${correlation}`;
+    outsideCheck({ ...both, what: `${what}, both within 5 to 95`, expected: bothWithin, ours: within });
+    outsideCheck({ ...both, what: `${what}, both below 95`, expected: bothBelow, ours: f(z, z) });
   });
 
   it('at the middle follows the arc sine', () => {
