@@ -1,21 +1,17 @@
-import type { FitCell, FitSheet, Verdict } from '@settlewright/anthropometry';
+import type { FitCell, FitSheet } from '@settlewright/anthropometry';
+import {
+  cellsOf,
+  isGain,
+  isLoss,
+  sheetChanges,
+  STATE_RANK,
+  stateOf,
+  type CellChange,
+  type CellState,
+} from '../choices/sheet-changes.ts';
 import type { SetDocument } from '../room/document.ts';
 import { MM_PER_INCH } from '../units/length-style.ts';
 import { leversFor, type Lever } from './fix-levers.ts';
-
-/** How one cell answers, reduced to what can be compared. */
-export type CellState = Verdict | 'inside' | 'outside' | 'gone';
-
-/** A cell whose answer a fix changes. */
-export interface CellChange {
-  cellId: string;
-  ruleId: string;
-  placeId?: string;
-  sitterId?: string;
-  marks: string[];
-  from: CellState;
-  to: CellState;
-}
 
 /** A change of one number that helps a cell, with all it does elsewhere. */
 export interface Fix {
@@ -38,15 +34,6 @@ export interface Fix {
 const MOST_FIXES = 5;
 const COARSE_STEPS = 12;
 const EIGHTH_MM = MM_PER_INCH / 8;
-const RANK: Record<CellState, number> = {
-  gone: -1,
-  wontFit: 0,
-  outside: 0,
-  notKnown: 1,
-  tight: 2,
-  fits: 3,
-  inside: 3,
-};
 
 interface Candidate {
   document: SetDocument;
@@ -70,26 +57,26 @@ export function suggestFixes(input: {
 }): Fix[] {
   const { document, cell, check } = input;
   const now = stateOf(cell);
-  if (now === undefined || RANK[now] === RANK.fits) return [];
-  const before = statesOf(check(document));
+  if (now === undefined || STATE_RANK[now] === STATE_RANK.fits) return [];
+  const before = check(document);
   const fixes = leversFor(document, cell, input.stepMm ?? EIGHTH_MM).flatMap((lever) => {
     const found = nearestHelp(lever, cell, now, check);
     if (found === undefined) return [];
-    const changes = changesBetween(before, statesOf(found.candidate.sheet));
+    const changes = sheetChanges(before, found.candidate.sheet);
     const { pieceId, mark, key, label, unit, fromValue } = lever;
     const fix: Fix = {
       ...{ pieceId, mark, key, label, unit, fromValue, toValue: found.value },
       reaches: found.candidate.state,
       document: found.candidate.document,
-      gains: changes.filter(({ from, to }) => RANK[to] > RANK[from]),
-      losses: changes.filter(({ from, to }) => RANK[to] < RANK[from]),
+      gains: changes.filter(isGain),
+      losses: changes.filter(isLoss),
     };
     return [{ fix, share: Math.abs(found.value - fromValue) / lever.reach }];
   });
   return fixes
     .sort(
       (a, b) =>
-        RANK[b.fix.reaches] - RANK[a.fix.reaches] ||
+        STATE_RANK[b.fix.reaches] - STATE_RANK[a.fix.reaches] ||
         a.fix.losses.length - b.fix.losses.length ||
         a.share - b.share,
     )
@@ -113,8 +100,8 @@ function nearestHelp(
       return tried.get(steps);
     };
     const line = scan(lever, attempt, start);
-    for (const wanted of [RANK.fits, RANK.tight]) {
-      if (wanted <= RANK[now]) continue;
+    for (const wanted of [STATE_RANK.fits, STATE_RANK.tight]) {
+      if (wanted <= STATE_RANK[now]) continue;
       const steps = firstReaching(line, attempt, wanted);
       const candidate = steps === undefined ? undefined : attempt(steps);
       if (steps !== undefined && candidate !== undefined) return [{ value: valueAt(steps), candidate }];
@@ -122,7 +109,7 @@ function nearestHelp(
     return [];
   });
   const better = (a: (typeof found)[number], b: (typeof found)[number]) =>
-    RANK[b.candidate.state] - RANK[a.candidate.state] ||
+    STATE_RANK[b.candidate.state] - STATE_RANK[a.candidate.state] ||
     Math.abs(a.value - lever.fromValue) - Math.abs(b.value - lever.fromValue);
   return found.sort(better)[0];
 }
@@ -140,7 +127,7 @@ function scan(lever: Lever, attempt: (steps: number) => Candidate | undefined, s
       break;
     }
     line.push(steps);
-    if (RANK[candidate.state] === RANK.fits) break;
+    if (STATE_RANK[candidate.state] === STATE_RANK.fits) break;
     if (line.length === 3 && candidate.margin < start && candidate.state !== 'tight') break;
   }
   return line;
@@ -152,7 +139,7 @@ function firstReaching(
   attempt: (steps: number) => Candidate | undefined,
   wanted: number,
 ): number | undefined {
-  const reaches = (steps: number) => RANK[attempt(steps)?.state ?? 'gone'] >= wanted;
+  const reaches = (steps: number) => STATE_RANK[attempt(steps)?.state ?? 'gone'] >= wanted;
   const index = line.findIndex(reaches);
   let high = line[index];
   if (high === undefined) return undefined;
@@ -186,47 +173,6 @@ function tryValue(
   return { document, sheet, state, margin: after === undefined ? -Infinity : marginOf(after) };
 }
 
-function cellsOf(sheet: FitSheet): FitCell[] {
-  return [...sheet.rows.flatMap(({ cells }) => cells), ...sheet.piecesAndWays];
-}
-
-function stateOf(cell: FitCell): CellState | undefined {
-  if (cell.outcome.kind === 'verdict') return cell.outcome.verdict;
-  if (cell.outcome.kind === 'clause') return cell.outcome.inside ? 'inside' : 'outside';
-  return undefined;
-}
-
 function marginOf(cell: FitCell): number {
   return cell.outcome.kind === 'verdict' ? cell.outcome.margin : 0;
-}
-
-function statesOf(sheet: FitSheet): Map<string, { cell: FitCell; state: CellState }> {
-  return new Map(
-    cellsOf(sheet).flatMap((cell) => {
-      const state = stateOf(cell);
-      return state === undefined ? [] : [[cell.id, { cell, state }] as const];
-    }),
-  );
-}
-
-/** Cells whose answer differs; a cell that is there only before is gone, one only after is new and not counted. */
-function changesBetween(
-  before: ReturnType<typeof statesOf>,
-  after: ReturnType<typeof statesOf>,
-): CellChange[] {
-  return [...before.values()].flatMap(({ cell, state }) => {
-    const to = after.get(cell.id)?.state ?? 'gone';
-    if (to === state) return [];
-    return [
-      {
-        cellId: cell.id,
-        ruleId: cell.ruleId,
-        ...(cell.placeId === undefined ? {} : { placeId: cell.placeId }),
-        ...(cell.sitterId === undefined ? {} : { sitterId: cell.sitterId }),
-        marks: cell.marks,
-        from: state,
-        to,
-      },
-    ];
-  });
 }

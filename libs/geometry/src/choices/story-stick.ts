@@ -1,0 +1,252 @@
+import type { FitCell, FitSheet, SitterRow, VerdictOutcome } from '@settlewright/anthropometry';
+import type { SetDocument } from '../room/document.ts';
+import type { Dimension } from './dimensions.ts';
+import { cellsOf, STATE_RANK, stateOf, type CellState } from './sheet-changes.ts';
+
+/** A stretch of values. */
+export interface Stretch {
+  from: number;
+  to: number;
+}
+
+/** One sitter's answer along a dimension. */
+export interface StickRow {
+  sitterId: string;
+  placeId: string;
+  name: string;
+  /** Best values of somebody who was not measured. */
+  estimated: boolean;
+  /** Where the sitter fits, by best values. */
+  fits: Stretch[];
+  /** Where the sitter is at least tight, by best values; holds `fits`. */
+  tight: Stretch[];
+  /** Where 95 of 100 such people would be at least tight, and where 5 of 100 would; as `tight` when measured. */
+  surelyTight: Stretch[];
+  perhapsTight: Stretch[];
+  /** Worst verdict at each value. */
+  states: CellState[];
+}
+
+/** A code clause along a dimension. */
+export interface StickClause {
+  ruleId: string;
+  clause: string;
+  marks: string[];
+  inside: Stretch[];
+}
+
+/** Everything a story stick shows of one dimension. */
+export interface StoryStick {
+  dimension: Dimension;
+  /** Rising values that were tried. */
+  values: number[];
+  /** Rules whose cells answer differently somewhere along the dimension or come nearer to it. */
+  ruleIds: string[];
+  rows: StickRow[];
+  clauses: StickClause[];
+  /** Values at which every row fits, and at which every row is at least tight; by best values. */
+  allFit: Stretch[];
+  allTight: Stretch[];
+}
+
+const MOST_VALUES = 96;
+
+/**
+ * The values along a dimension that a stick tries: multiples of the rounding step, and the present value.
+ *
+ * @param dimension - the dimension
+ * @param stepSize - rounding step in the dimension's unit
+ * @returns rising values, at most about a hundred
+ */
+export function stickValues(dimension: Dimension, stepSize: number): number[] {
+  const { min, max, value } = dimension;
+  const times = Math.max(1, Math.ceil((max - min) / stepSize / MOST_VALUES));
+  const step = stepSize * times;
+  const values = [value];
+  for (let n = Math.ceil(min / step - 1e-9); n * step <= max + 1e-9; n += 1) {
+    if (Math.abs(n * step - value) > 1e-6) values.push(n * step);
+  }
+  return values.sort((a, b) => a - b);
+}
+
+/**
+ * Tries a dimension value by value and tells where each sitter fits.
+ *
+ * @param input - the dimension; the values to try, rising; the check of a set; and the rule whose bands are wanted,
+ *   or every person rule that the dimension moves when absent
+ * @returns a generator that yields how many values were tried, so that a page can paint between them, and returns the
+ *   stick. Ends of bands lie where the best value crosses a line, between two values by straight interpolation
+ */
+export function* storyStick(input: {
+  dimension: Dimension;
+  values: readonly number[];
+  check: (document: SetDocument) => FitSheet;
+  ruleId?: string;
+}): Generator<number, StoryStick, void> {
+  const { dimension, check, ruleId } = input;
+  const values: number[] = [];
+  const sheets: FitSheet[] = [];
+  for (const [index, value] of input.values.entries()) {
+    const document = dimension.at(value);
+    if (document !== undefined) {
+      values.push(value);
+      sheets.push(check(document));
+    }
+    yield index + 1;
+  }
+  const moving = movingRules(sheets);
+  const shown = ruleId === undefined ? moving : new Set([ruleId]);
+  const rows = (sheets[0]?.rows ?? []).map((row) => stickRow(row, values, sheets, shown));
+  const told = rows.filter(({ states }) => states.some((state) => state !== 'gone'));
+  return {
+    dimension,
+    values,
+    ruleIds: [...moving],
+    rows: told,
+    clauses: clausesOf(values, sheets),
+    allFit: common(told.map(({ fits }) => fits)),
+    allTight: common(told.map(({ tight }) => tight)),
+  };
+}
+
+/** Rules of which some cell's number or line changes along the dimension. */
+function movingRules(sheets: readonly FitSheet[]): Set<string> {
+  const [first] = sheets;
+  const moving = new Set<string>();
+  if (first === undefined) return moving;
+  const start = new Map(
+    first.rows.flatMap(({ cells }) => cells.map((cell) => [cell.id, said(cell)] as const)),
+  );
+  for (const sheet of sheets) {
+    for (const cell of sheet.rows.flatMap(({ cells }) => cells)) {
+      if (!moving.has(cell.ruleId) && start.get(cell.id) !== said(cell)) moving.add(cell.ruleId);
+    }
+  }
+  return moving;
+}
+
+const said = ({ outcome }: FitCell): string =>
+  outcome.kind === 'verdict' ? `${outcome.margin.toFixed(6)} ${outcome.value.toFixed(6)}` : outcome.kind;
+
+function stickRow(
+  row: SitterRow,
+  values: readonly number[],
+  sheets: readonly FitSheet[],
+  shown: ReadonlySet<string>,
+): StickRow {
+  const along = sheets.map((sheet) => {
+    const cells = sheet.rows.find(({ placeId }) => placeId === row.placeId)?.cells ?? [];
+    return cells.filter(({ ruleId, outcome }) => shown.has(ruleId) && outcome.kind === 'verdict');
+  });
+  const rooms = (room: (outcome: VerdictOutcome) => number) =>
+    along.map((cells) =>
+      Math.min(...cells.map(({ outcome }) => (outcome.kind === 'verdict' ? room(outcome) : Infinity))),
+    );
+  const { sitterId, placeId, name } = row;
+  return {
+    sitterId,
+    placeId,
+    name,
+    estimated: along.some((cells) =>
+      cells.some(({ outcome }) => outcome.kind === 'verdict' && outcome.estimated),
+    ),
+    fits: stretches(values, rooms(roomToPass)),
+    tight: stretches(
+      values,
+      rooms(({ margin }) => margin),
+    ),
+    surelyTight: stretches(
+      values,
+      rooms(({ margin, marginRange }) => marginRange?.low ?? margin),
+    ),
+    perhapsTight: stretches(
+      values,
+      rooms(({ margin, marginRange }) => marginRange?.high ?? margin),
+    ),
+    states: along.map(worstOf),
+  };
+}
+
+const roomToPass = ({ value, pass }: VerdictOutcome): number =>
+  Math.min(
+    pass.lower === undefined ? Infinity : value - pass.lower,
+    pass.upper === undefined ? Infinity : pass.upper - value,
+  );
+
+const worstOf = (cells: readonly FitCell[]): CellState =>
+  cells
+    .map((cell) => stateOf(cell) ?? 'gone')
+    .reduce<CellState>((worst, state) => {
+      if (worst === 'gone') return state;
+      return STATE_RANK[state] < STATE_RANK[worst] ? state : worst;
+    }, 'gone');
+
+/** How far below zero still counts as on the line, millimetres. */
+const ON_THE_LINE = 0.1;
+
+/** Where a series is not negative; its ends by straight interpolation between two values. */
+function stretches(values: readonly number[], rooms: readonly number[]): Stretch[] {
+  const found: Stretch[] = [];
+  let from: number | undefined;
+  for (const [i, room] of rooms.entries()) {
+    const value = values[i] as number;
+    const inside = room >= -ON_THE_LINE && room !== Infinity;
+    if (inside && from === undefined) from = crossing(values, rooms, i - 1, i) ?? value;
+    if (!inside && from !== undefined) {
+      found.push({ from, to: crossing(values, rooms, i - 1, i) ?? (values[i - 1] as number) });
+      from = undefined;
+    }
+  }
+  if (from !== undefined) found.push({ from, to: values.at(-1) as number });
+  return found;
+}
+
+function crossing(
+  values: readonly number[],
+  rooms: readonly number[],
+  before: number,
+  after: number,
+): number | undefined {
+  const [a, b] = [rooms[before], rooms[after]];
+  if (a === undefined || b === undefined || !Number.isFinite(a) || !Number.isFinite(b) || a === b)
+    return undefined;
+  const share = Math.min(1, Math.max(0, -a / (b - a)));
+  const [from, to] = [values[before] as number, values[after] as number];
+  return from + share * (to - from);
+}
+
+/** What several lists of stretches have in common. */
+function common(lists: readonly (readonly Stretch[])[]): Stretch[] {
+  const [first, ...rest] = lists;
+  return rest.reduce<Stretch[]>(
+    (kept, list) =>
+      kept.flatMap((a) =>
+        list.flatMap((b) => {
+          const both = { from: Math.max(a.from, b.from), to: Math.min(a.to, b.to) };
+          return both.from <= both.to ? [both] : [];
+        }),
+      ),
+    [...(first ?? [])],
+  );
+}
+
+/** Clauses that are asked and answer differently along the dimension. */
+function clausesOf(values: readonly number[], sheets: readonly FitSheet[]): StickClause[] {
+  const found = new Map<string, { cell: FitCell; clause: string; rooms: number[] }>();
+  for (const [i, sheet] of sheets.entries()) {
+    for (const cell of cellsOf(sheet)) {
+      if (cell.outcome.kind !== 'clause') continue;
+      const entry = found.get(cell.id) ?? { cell, clause: cell.outcome.clause, rooms: sheets.map(() => -1) };
+      entry.rooms[i] = cell.outcome.inside ? 1 : -1;
+      found.set(cell.id, entry);
+    }
+  }
+  return [...found.values()]
+    .filter(({ rooms }) => rooms.some((room) => room !== rooms[0]))
+    .map(({ cell, clause, rooms }) => ({
+      ruleId: cell.ruleId,
+      clause,
+      marks: cell.marks,
+      inside: stretches(values, rooms),
+    }));
+}
