@@ -1,19 +1,15 @@
 import { boardRun } from '../parts/boards.ts';
 import { partList } from '../parts/part-list.ts';
 import type { Part } from '../parts/part.ts';
-import { normalTurnDeg, toPiece } from '../parts/placement.ts';
 import { cutOut, type Rectangle } from '../parts/rectangles.ts';
 import type { PieceOf, SetDocument } from '../room/document.ts';
 import { sentenceOf, type PieceDefinition } from './kind.ts';
-import { windowHole } from './sill.ts';
 import { BOARDS } from './starting-sizes.ts';
+import { holeInWall } from './wall-window.ts';
 
 type Bulkhead = PieceOf<'bulkhead'>;
 
 const BOARD_MM = 18;
-/** A sill belongs to a wall when its rear edge lies this near the wall's face. */
-const SILL_TO_WALL_MM = 60;
-const SILL_TO_WALL_DEG = 3;
 /** Slivers of board beside an opening that nobody would cut. */
 const SMALLEST_OFFCUT_MM = 3;
 
@@ -134,15 +130,5 @@ function slab(area: Rectangle, z0: number, z1: number) {
 
 /** Openings of the windows whose sills stand against this wall, in the wall's frame. */
 function holesIn(wall: Bulkhead, document: SetDocument): Rectangle[] {
-  const holes: Rectangle[] = [];
-  for (const piece of document.pieces) {
-    if (piece.kind !== 'sill') continue;
-    const hole = windowHole(piece);
-    if (hole === undefined) continue;
-    const [x, , z] = toPiece(wall.at, [piece.at.xMm, 0, piece.at.zMm]);
-    const turned = Math.abs(normalTurnDeg(piece.at.turnDeg - wall.at.turnDeg));
-    if (Math.abs(z) > SILL_TO_WALL_MM || turned > SILL_TO_WALL_DEG) continue;
-    holes.push({ ...hole, x0: hole.x0 + x, x1: hole.x1 + x });
-  }
-  return holes;
+  return document.pieces.flatMap((piece) => (piece.kind === 'sill' ? (holeInWall(wall, piece) ?? []) : []));
 }
