@@ -58,3 +58,5 @@ export { dimensionOf, dimensionsOf, type Dimension } from './choices/dimensions.
 export { isGain, isLoss, sheetChanges, type CellChange, type CellState } from './choices/sheet-changes.ts';
 export { stickValues, storyStick } from './choices/story-stick.ts';
 export type { StickClause, StickRow, StoryStick, Stretch } from './choices/story-stick.ts';
+export { compareSheets } from './choices/compare-sheets.ts';
+export type { ComparedCell, ComparedSheets, ComparedSitter } from './choices/compare-sheets.ts';

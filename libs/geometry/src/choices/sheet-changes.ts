@@ -71,7 +71,9 @@ export function sheetChanges(before: FitSheet, after: FitSheet): CellChange[] {
 }
 
 /** True for a change to a better answer. */
-export const isGain = ({ from, to }: CellChange): boolean => STATE_RANK[to] > STATE_RANK[from];
+export const isGain = ({ from, to }: Pick<CellChange, 'from' | 'to'>): boolean =>
+  STATE_RANK[to] > STATE_RANK[from];
 
 /** True for a change to a worse answer. */
-export const isLoss = ({ from, to }: CellChange): boolean => STATE_RANK[to] < STATE_RANK[from];
+export const isLoss = ({ from, to }: Pick<CellChange, 'from' | 'to'>): boolean =>
+  STATE_RANK[to] < STATE_RANK[from];

@@ -1,0 +1,75 @@
+import {
+  checkSet,
+  createBodyModel,
+  loadRuleBook,
+  type FitSheet,
+  type Sitter,
+} from '@settlewright/anthropometry';
+import rules from '@settlewright/seed-data/fit-rules.json' with { type: 'json' };
+import survey from '@settlewright/seed-data/populations/ansur2.json' with { type: 'json' };
+import { describe, expect, it } from 'vitest';
+import { ARRANGEMENTS } from '../room/arrangements.ts';
+import type { SetDocument } from '../room/document.ts';
+import { measureSet } from '../situation/measure-set.ts';
+import { compareSheets } from './compare-sheets.ts';
+import { dimensionOf } from './dimensions.ts';
+
+const ruleBook = loadRuleBook(rules);
+const model = createBodyModel(survey);
+
+const seated = (id: string, placeId: string, bodyData: 'women' | 'men', percentile: number): Sitter => ({
+  id,
+  name: id,
+  kind: 'mannequin',
+  placeId,
+  person: model.mannequin({ bodyData, measure: 'stature', percentile }),
+});
+
+const SMALL = seated('small', 'b1:1', 'women', 5);
+const TALL = seated('tall', 'b2:1', 'men', 95);
+
+const sheetOf = (document: SetDocument, sitters: Sitter[]): FitSheet =>
+  checkSet({
+    situation: measureSet(document),
+    sitters,
+    ruleBook,
+    model,
+    settings: { backPosture: 'dining', trafficBehind: 'none' },
+  });
+
+const bay = ARRANGEMENTS.find(({ id }) => id === 'facing-benches')?.build() as SetDocument;
+const height = dimensionOf(bay, 'seat-height');
+const lower = height?.at(height.value - 60) as SetDocument;
+
+describe('two sheets side by side', () => {
+  const compared = compareSheets(sheetOf(bay, [SMALL, TALL]), sheetOf(lower, [SMALL, TALL]));
+  const of = (sitterId: string) => compared.sitters.find((one) => one.sitterId === sitterId);
+
+  it('tells that a lower seat helps the small sitter and costs the tall one', () => {
+    expect(of('small')?.gains.map(({ ruleId }) => ruleId)).toContain('SEAT-02');
+    expect(of('tall')?.losses.map(({ ruleId }) => ruleId)).toContain('SEAT-02');
+    expect(of('tall')?.gains.map(({ ruleId }) => ruleId)).not.toContain('SEAT-02');
+  });
+
+  it('turns round when the sheets change places', () => {
+    const back = compareSheets(sheetOf(lower, [SMALL, TALL]), sheetOf(bay, [SMALL, TALL]));
+    for (const { sitterId, gains, losses, kept } of back.sitters) {
+      expect(gains.map(({ ruleId }) => ruleId)).toEqual(of(sitterId)?.losses.map(({ ruleId }) => ruleId));
+      expect(losses.map(({ ruleId }) => ruleId)).toEqual(of(sitterId)?.gains.map(({ ruleId }) => ruleId));
+      expect(kept).toBe(of(sitterId)?.kept);
+    }
+  });
+
+  it('follows a person to another place, and names who came and who left', () => {
+    const [moved, came] = [{ ...SMALL, placeId: 'b2:2' }, seated('came', 'b1:2', 'men', 50)];
+    const { sitters, joined, left } = compareSheets(sheetOf(bay, [SMALL, TALL]), sheetOf(bay, [moved, came]));
+    expect(sitters.map(({ sitterId }) => sitterId)).toEqual(['small']);
+    expect([joined, left]).toEqual([['came'], ['tall']]);
+  });
+
+  it('finds nothing between a sheet and itself', () => {
+    const sheet = sheetOf(bay, [SMALL, TALL]);
+    const { sitters, pieces } = compareSheets(sheet, sheet);
+    expect([...sitters, pieces].flatMap(({ gains, losses }) => [...gains, ...losses])).toEqual([]);
+  });
+});
