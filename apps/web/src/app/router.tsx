@@ -56,6 +56,7 @@ export const router = createBrowserRouter([
                           { path: 'orders/:orderId', lazy: () => import('@/routes/order.tsx') },
                           { path: 'sets/:setId/fit', lazy: () => import('@/routes/fit.tsx') },
                           { path: 'sets/:setId/revisions', lazy: () => import('@/routes/revisions.tsx') },
+                          { path: 'sets/:setId/compare', lazy: () => import('@/routes/compare.tsx') },
                         ],
                       },
                     ],

@@ -1,3 +1,4 @@
+export { ComparePage } from './compare/compare-page.tsx';
 export { RevisionsPage } from './components/revisions-page.tsx';
 export { RoomPage } from './components/room-page.tsx';
 export { SpecLine } from './components/spec-line.tsx';

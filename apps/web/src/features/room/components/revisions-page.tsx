@@ -1,5 +1,5 @@
 import { useMemo } from 'react';
-import { useSearchParams } from 'react-router-dom';
+import { Link, useSearchParams } from 'react-router-dom';
 import { classNames } from '@/components/class-names.ts';
 import { PaleBars } from '@/components/loading.tsx';
 import { Notice } from '@/components/notice.tsx';
@@ -34,6 +34,13 @@ export function RevisionsPage({ path }: { path: SetPath }) {
       <PageHeading
         title={`Revisions of ${name}`}
         below="Issued revisions are frozen. Orders, quotes, papers and approvals cite them; the draft goes on."
+        actions={
+          list.length > 0 && (
+            <Link className="link self-center" to={`${home}/compare${letter ? `?from=${letter}` : ''}`}>
+              Compare{letter ? ` ${letter}` : ''} with the draft
+            </Link>
+          )
+        }
       />
       {revisions.isError && <Notice tone="wont">{sayProblem(revisions.error)}</Notice>}
       {revisions.isPending && <PaleBars words="Fetching the revisions" />}
