@@ -73,8 +73,8 @@ describe('input that should not be taken', () => {
     ['NaN', /“NaN” is not a length/],
     ['-18', /below zero/],
     ['9e99', /not a length|longest/],
-    ['40000', /longest length read|Most possible here is/],
-    ['0', /Least possible here is/],
+    ['40000', /longest length read|Highest possible is|Highest here is/],
+    ['0', /Lowest possible is/],
     ['1/0', /can be read in more than one way|not a length/],
   ])('refuses a seat height of “%s” in words and keeps the old one', async (typed, words) => {
     await choose(page, 'B1');

@@ -93,7 +93,7 @@ export function NumberFlag({ pieceId, parameter, look, slipId, onHand, onNext }:
   function fieldKeys(event: KeyboardEvent<HTMLInputElement>) {
     edit.keys(event);
     if (event.key !== 'Tab') return;
-    if (reading.kind !== 'value') {
+    if (reading.kind !== 'value' || edit.beyond) {
       event.preventDefault();
       focusWayOut(slipId);
     } else if (!edit.finish() || onNext(event.shiftKey)) event.preventDefault();

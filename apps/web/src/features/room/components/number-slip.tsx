@@ -2,7 +2,8 @@ import { setParameter } from '@settlewright/geometry';
 import { Button } from '@/components/button.tsx';
 import { Measure } from '@/components/measure.tsx';
 import { inOtherUnits, showNumber, stepOf, type NumberParameter, type Reading } from '../numbers.ts';
-import { useSurroundings } from '../room-context.tsx';
+import { usePiece, useSurroundings } from '../room-context.tsx';
+import { beyondRoom, limitWord, roomOf, sayBeyond, type BeyondRoom } from '../room-limits.ts';
 import { useRoom } from '../store.ts';
 import { sayWishes, wishesFor } from '../verdict-words.ts';
 import { BandLink } from './band-link.tsx';
@@ -19,6 +20,11 @@ interface Props {
 /** What was read, in both units, and who minds; or what could not be read, with the ways out. */
 export function NumberSlip({ id, pieceId, parameter, reading, editing, onTake }: Props) {
   const { style } = useSurroundings();
+  const document = useRoom((state) => state.document);
+  const beyond =
+    'value' in reading
+      ? beyondRoom(parameter, reading.value, roomOf(document, pieceId, parameter.key), style)
+      : undefined;
   const offered = (value: number): string => {
     const other = inOtherUnits(parameter, style, value);
     return other ? `${showNumber(parameter, style, value)}, ${other}` : showNumber(parameter, style, value);
@@ -37,6 +43,22 @@ export function NumberSlip({ id, pieceId, parameter, reading, editing, onTake }:
             </>
           )}
         </strong>
+        {beyond && (
+          <div
+            role={editing ? 'alert' : undefined}
+            onMouseDown={(event) => event.preventDefault()}
+            className="my-1"
+          >
+            <RoomEnd pieceId={pieceId} parameter={parameter} beyond={beyond} onTake={onTake} />
+            {editing && (
+              <Button look="word" className="ml-3" onClick={() => onTake(reading.value)}>
+                <span>
+                  Keep <Measure text={showNumber(parameter, style, reading.value)} />
+                </span>
+              </Button>
+            )}
+          </div>
+        )}
         <p className="text-sm text-ink-2">
           Up and down keys move it{' '}
           <Measure text={showNumber({ ...parameter, key: 'step' }, style, stepOf(parameter, style))} />.{' '}
@@ -54,10 +76,12 @@ export function NumberSlip({ id, pieceId, parameter, reading, editing, onTake }:
       onMouseDown={(event) => event.preventDefault()}
       className="border-l-[3px] border-wont pl-4"
     >
-      {reading.kind === 'outside' ? (
+      {reading.kind === 'outside' && beyond ? (
+        <RoomEnd pieceId={pieceId} parameter={parameter} beyond={beyond} onTake={onTake} />
+      ) : reading.kind === 'outside' ? (
         <>
           <strong className="block font-medium text-wont">
-            {reading.which === 'longest' ? 'Most possible here is ' : 'Least possible here is '}
+            {limitWord(parameter, reading.which === 'longest' ? 'most' : 'least')} possible is{' '}
             <Measure text={showNumber(parameter, style, reading.limit)} />
           </strong>
           <Button look="word" onClick={() => onTake(reading.limit)}>
@@ -82,6 +106,29 @@ export function NumberSlip({ id, pieceId, parameter, reading, editing, onTake }:
         It stays at <Measure text={showNumber(parameter, style)} /> until you choose.
       </p>
     </div>
+  );
+}
+
+/** The end of the room: how far it goes, what stands there, and the way to take it. */
+function RoomEnd({
+  pieceId,
+  parameter,
+  beyond,
+  onTake,
+}: Pick<Props, 'pieceId' | 'parameter' | 'onTake'> & { beyond: BeyondRoom }) {
+  const { style } = useSurroundings();
+  const piece = usePiece(pieceId);
+  if (!piece) return null;
+  return (
+    <>
+      <strong className="block font-medium">
+        {limitWord(parameter, beyond.side)} here is{' '}
+        <Measure text={showNumber(parameter, style, beyond.offer)} /> ({sayBeyond(beyond.limit, piece)}).
+      </strong>
+      <Button look="word" onClick={() => onTake(beyond.offer)}>
+        Use it
+      </Button>
+    </>
   );
 }
 

@@ -36,8 +36,8 @@ function valueOf(key: string): number {
   return Number(parameter?.value);
 }
 
-function open(canEdit = true) {
-  store = createRoomStore(document);
+function open(canEdit = true, opened = document) {
+  store = createRoomStore(opened);
   const surroundings: RoomSurroundings = {
     path: { workshopId: 'w', productionId: 'p', setId: 's' },
     setName: 'Dining car',
@@ -154,9 +154,61 @@ describe('a number of the spec sentence', () => {
     const depth = screen.getByRole('textbox', { name: 'Seat depth' });
     await user.clear(depth);
     await user.type(depth, '9 ft');
-    expect(screen.getByRole('alert')).toHaveTextContent('Most possible here is');
+    expect(screen.getByRole('alert')).toHaveTextContent(/^Deepest possible is ≈.*39⅜″/);
     await user.click(screen.getByRole('button', { name: 'Use it' }));
     expect(valueOf('seatDepthMm')).toBeCloseTo(limit, 6);
+  });
+
+  describe('that goes further than the room it has', () => {
+    // A second bench stands 300 to the right of the first, which grows both ways about its middle.
+    const bay = addPiece(document, 'bench').document;
+    const length = () => screen.getByRole('textbox', { name: 'Length' });
+    async function typeLength(text: string) {
+      const user = open(true, bay);
+      await user.click(screen.getByRole('button', { name: /^Length, / }));
+      await user.clear(length());
+      await user.type(length(), text);
+      return user;
+    }
+
+    it('says what it meets, and takes the longest there is with Tab and Enter', async () => {
+      const user = await typeLength("6' 6in");
+      expect(screen.getByRole('alert')).toHaveTextContent(/^Longest here is 5′.*11½″ \(then it meets B2\)\./);
+      await user.tab();
+      expect(screen.getByRole('button', { name: 'Use it' })).toHaveFocus();
+      expect(store.getState().document).toBe(bay);
+      await user.keyboard('{Enter}');
+      expect(valueOf('lengthMm')).toBeCloseTo(71.5 * 25.4, 6);
+      expect(undoNames(store).undo).toMatch(/^B1 length 4′\s0″ to 5′\s11½″$/);
+    });
+
+    it('is kept knowingly with Enter, and the meeting is said', async () => {
+      const user = await typeLength("6' 6in{Enter}");
+      expect(valueOf('lengthMm')).toBeCloseTo(78 * 25.4, 6);
+      expect(useAnnouncement.getState().text).toMatch(/Longest here is 5′\s11½″ \(then it meets B2\)/);
+      await user.keyboard('{Enter}');
+      expect(screen.getByText(/^Longest here is/)).toBeInTheDocument();
+    });
+
+    it('can be kept with a press as well', async () => {
+      const user = await typeLength("6' 6in");
+      await user.click(screen.getByRole('button', { name: /^Keep 6′/ }));
+      expect(valueOf('lengthMm')).toBeCloseTo(78 * 25.4, 6);
+    });
+
+    it('names the bay before the limit of the piece itself', async () => {
+      const user = await typeLength('200 ft{Enter}');
+      expect(store.getState().document).toBe(bay);
+      expect(screen.getByRole('alert')).toHaveTextContent(/^Longest here is 5′.*11½″/);
+      expect(screen.queryByRole('button', { name: /^Keep/ })).not.toBeInTheDocument();
+      await user.click(screen.getByRole('button', { name: 'Use it' }));
+      expect(valueOf('lengthMm')).toBeCloseTo(71.5 * 25.4, 6);
+    });
+
+    it('goes unmentioned while it has room', async () => {
+      await typeLength("5' 6in");
+      expect(screen.queryByText(/Longest here/)).not.toBeInTheDocument();
+    });
   });
 
   it('says in both units what is read, and who needs it otherwise', async () => {

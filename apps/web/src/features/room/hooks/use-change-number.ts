@@ -1,8 +1,15 @@
-import { parametersOf, setParameter, type SetDocument } from '@settlewright/geometry';
+import {
+  parametersOf,
+  setParameter,
+  type Piece,
+  type RoomFor,
+  type SetDocument,
+} from '@settlewright/geometry';
 import { useCallback } from 'react';
 import { announce } from '@/lib/announce.ts';
 import { sayNumber, showNumber, type NumberParameter } from '../numbers.ts';
 import { useSurroundings } from '../room-context.tsx';
+import { beyondRoom, roomOf, sayLimit } from '../room-limits.ts';
 import { useRoomStore } from '../store.ts';
 import { changedVerdicts } from '../verdict-words.ts';
 
@@ -11,6 +18,8 @@ export interface ChangeNumber {
   preview: (value: number | null) => void;
   /** Takes the value as one named step; returns the reason when it cannot be. */
   commit: (value: number) => string | undefined;
+  /** How far the value may go before the piece meets another. */
+  room: () => RoomFor;
 }
 
 /** Changes one number of one piece, by whatever control it is typed in. */
@@ -44,20 +53,27 @@ export function useChangeNumber(pieceId: string, parameter: NumberParameter): Ch
       }
       const changed = setParameter(document, pieceId, key, value);
       if (!changed.ok) return changed.error.message;
-      takeStep(document, changed.value, { ...before, value: before.value }, piece.mark);
+      takeStep(document, changed.value, { ...before, value: before.value }, piece);
       return undefined;
 
-      function takeStep(old: SetDocument, next: SetDocument, was: NumberParameter, mark: string) {
+      function takeStep(old: SetDocument, next: SetDocument, was: NumberParameter, piece: Piece) {
         const label = was.label.charAt(0).toLowerCase() + was.label.slice(1);
         const [from, to] = [showNumber(was, style), showNumber(was, style, value)];
-        store.getState().commit(next, `${mark} ${label} ${from} to ${to}`);
+        store.getState().commit(next, `${piece.mark} ${label} ${from} to ${to}`);
         const verdicts = changedVerdicts(maker.check(old), maker.check(next), engine.ruleBook);
-        const words = [`${was.label} ${sayNumber(was, style, value)}`, ...verdicts];
+        const beyond = beyondRoom(was, value, roomOf(old, pieceId, key), style);
+        const words = [
+          `${was.label} ${sayNumber(was, style, value)}`,
+          ...(beyond ? [sayLimit(was, beyond, piece, style)] : []),
+          ...verdicts,
+        ];
         announce(`${words.join('. ')}.`);
       }
     },
     [store, pieceId, key, maker, engine, style],
   );
 
-  return { preview, commit };
+  const room = useCallback(() => roomOf(store.getState().document, pieceId, key), [store, pieceId, key]);
+
+  return { preview, commit, room };
 }

@@ -2,12 +2,15 @@ import type { LengthStyle } from '@settlewright/geometry';
 import { useState, type KeyboardEvent } from 'react';
 import { typedForm } from '@/components/measure.tsx';
 import { readNumber, showNumber, stepped, type NumberParameter, type Reading } from '../numbers.ts';
+import { beyondRoom, type BeyondRoom } from '../room-limits.ts';
 import type { ChangeNumber } from './use-change-number.ts';
 
 export interface NumberEdit {
   editing: boolean;
   text: string;
   reading: Reading;
+  /** Set while what stands in the field goes further than the room it has. */
+  beyond: BeyondRoom | undefined;
   begin: (text?: string) => void;
   type: (text: string) => void;
   /** Takes a value that was offered: a limit, or one of two readings. */
@@ -33,7 +36,7 @@ const stepsOf = (event: KeyboardEvent): number => {
 export function useNumberEdit(
   parameter: NumberParameter,
   style: LengthStyle,
-  change: ChangeNumber,
+  change: Omit<ChangeNumber, 'room'> & Partial<ChangeNumber>,
   after: { committed?: () => void; left?: () => void } = {},
 ): NumberEdit {
   const [typed, setTyped] = useState<Typed | null>(null);
@@ -43,6 +46,11 @@ export function useNumberEdit(
     now.exact === undefined ? readNumber(parameter, now.text, style) : { kind: 'value', value: now.exact };
   const inHand: Typed = typed ?? { text: shown };
   const reading: Reading = refused === undefined ? read(inHand) : { kind: 'unreadable', message: refused };
+
+  const beyond =
+    typed !== null && change.room && 'value' in reading
+      ? beyondRoom(parameter, reading.value, change.room(), style)
+      : undefined;
 
   function put(next: Typed) {
     setRefused(undefined);
@@ -112,6 +120,7 @@ export function useNumberEdit(
     editing: typed !== null,
     text: inHand.text,
     reading,
+    beyond,
     begin: (text) => (text === undefined ? setTyped({ text: typedForm(shown) }) : put({ text })),
     type: (text) => put({ text }),
     take,

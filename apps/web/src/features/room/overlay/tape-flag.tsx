@@ -159,7 +159,7 @@ function EditableFlag({
         onKeyDown={(event) => {
           event.stopPropagation();
           edit.keys(event);
-          if (event.key === 'Tab' && !edit.finish()) {
+          if (event.key === 'Tab' && (edit.beyond || !edit.finish())) {
             event.preventDefault();
             focusWayOut(slipId);
           }
