@@ -133,7 +133,8 @@ export const pieceCell = (
   settings: Partial<CheckSettings> = {},
 ): FitCell => found(check(situation, sitters, settings).piecesAndWays, ruleId);
 
-function found<T extends FitCell>(cells: readonly T[], ruleId: string): T {
+/** The cell of one rule. */
+export function found<T extends FitCell>(cells: readonly T[], ruleId: string): T {
   const cell = cells.find((one) => one.ruleId === ruleId);
   if (!cell) throw new Error(`no cell of ${ruleId}`);
   return cell;

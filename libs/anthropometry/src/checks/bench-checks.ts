@@ -210,6 +210,61 @@ export const backAngle: PieceCheck = {
   }),
 };
 
+/** Asks the backs of benches; a wall alone is a back without a curve. */
+const eachBack = (ask: (lumbar: NonNullable<BenchSituation['lumbar']>, rule: Rule) => PieceAnswer['said']) =>
+  eachBench(({ lumbar }, { rule }) =>
+    lumbar ? ask(lumbar, rule) : { kind: 'doesNotApply', reason: 'no back' },
+  );
+
+/**
+ * Height of the curve of a back over the pressed seat.
+ *
+ * @source rule BACK-02
+ */
+export const lumbarHeight: PieceCheck = {
+  id: 'BACK-02',
+  ask: eachBack(({ apexMm }, rule) =>
+    apexMm === 0
+      ? { kind: 'doesNotApply', reason: 'the back is flat' }
+      : plainQuestion('curve over the pressed seat', apexMm, {
+          lower: fixedSide(ruleNumber(rule, 'passLower'), ruleNumber(rule, 'failLower')),
+          upper: fixedSide(ruleNumber(rule, 'passUpper'), ruleNumber(rule, 'failUpper')),
+        }),
+  ),
+};
+
+/**
+ * Room for the pelvis: how far the back gives way a little over the seat.
+ *
+ * @source rule BACK-04
+ */
+export const pelvisRoom: PieceCheck = {
+  id: 'BACK-04',
+  ask: eachBack(({ recessMm }, rule) =>
+    plainQuestion('back gives way by', recessMm, {
+      lower: fixedSide(ruleNumber(rule, 'pass'), ruleNumber(rule, 'fail')),
+    }),
+  ),
+};
+
+/**
+ * People that whoever sits innermost slides past to get out.
+ *
+ * @source rule EGRESS-08
+ */
+export const slidePast: PieceCheck = {
+  id: 'EGRESS-08',
+  ask: eachBench((bench, { rule }) => {
+    if (bench.placeIds.length === 0) return NO_PLACES;
+    if (bench.slidePast === undefined) {
+      return { kind: 'notAsked', reason: `the drawing shows no way out of ${bench.mark}` };
+    }
+    return plainQuestion('people to slide past', bench.slidePast, {
+      upper: fixedSide(ruleNumber(rule, 'pass'), ruleNumber(rule, 'fail')),
+    });
+  }),
+};
+
 const sides = (rule: Rule, lower: string, upper: string) => ({
   lower: fixedSide(ruleNumber(rule, lower), ruleNumber(rule, 'failLower')),
   upper: fixedSide(ruleNumber(rule, upper), ruleNumber(rule, 'failUpper')),

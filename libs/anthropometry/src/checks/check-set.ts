@@ -71,13 +71,17 @@ const judgementOf = ({ ruleBook, settings }: CheckInput, rule: Rule): Judgement 
 });
 
 function rowOf(input: CheckInput, sitter: Sitter, place: PlaceSituation | undefined): SitterRow {
-  const { ruleBook, model } = input;
+  const { ruleBook, model, settings } = input;
+  const { lensHeightMm } = settings;
   const body = model.predict(sitter.person);
   const sink = sinkUnder(place?.foam, body);
   const cells = PERSON_CHECKS.map((check): FitCell => {
     const rule = ruleBook.rule(check.id);
     const placed: Answered = place
-      ? answered(check.ask({ rule, place, name: sitter.name, body, sink, model }), judgementOf(input, rule))
+      ? answered(
+          check.ask({ rule, place, name: sitter.name, body, sink, model, lensHeightMm }),
+          judgementOf(input, rule),
+        )
       : { outcome: { kind: 'doesNotApply', reason: 'no such place' }, pieces: [] };
     return {
       id: `${rule.id}|${sitter.placeId}`,

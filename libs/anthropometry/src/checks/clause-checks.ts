@@ -1,53 +1,7 @@
-import type { ClauseOutcome, LimitLines } from './fit-sheet.ts';
-import type { PieceAnswer, PieceAsked, PieceCheck } from './piece-check.ts';
+import { accessibleOnly } from './clause.ts';
+import type { PieceAsked, PieceCheck } from './piece-check.ts';
 import { ruleNumber, type Rule } from './rule-book.ts';
 import type { BenchSituation, TableSituation } from './situation.ts';
-
-type Part = ClauseOutcome['parts'][number];
-
-/** Makes one part of a clause. */
-type PartMaker = (label: string, value: number, limits: LimitLines) => Part;
-
-/** Asks the pieces marked accessible; the first part of a clause is its value. */
-const accessibleOnly =
-  <T extends { pieceId: string; mark: string; accessible: boolean }>(
-    word: string,
-    pieces: (asked: PieceAsked) => T[],
-    partsOf: (piece: T, rule: Rule, part: PartMaker) => Part[],
-  ) =>
-  (asked: PieceAsked): PieceAnswer[] => {
-    const found = pieces(asked).filter(({ accessible }) => accessible);
-    if (found.length === 0) {
-      return [
-        { pieceIds: [], marks: [], said: { kind: 'notAsked', reason: `no ${word} is marked accessible` } },
-      ];
-    }
-    const { rule, tolerance } = asked;
-    const part: PartMaker = (label, value, limits) => ({
-      label,
-      value,
-      limits,
-      inside:
-        value >= (limits.lower ?? -Infinity) - tolerance && value <= (limits.upper ?? Infinity) + tolerance,
-    });
-    return found.map((piece) => ({
-      pieceIds: [piece.pieceId],
-      marks: [piece.mark],
-      said: clauseOf(rule, partsOf(piece, rule, part)),
-    }));
-  };
-
-function clauseOf(rule: Rule, parts: Part[]): ClauseOutcome {
-  const shown = parts.find(({ inside }) => !inside) ?? parts[0];
-  return {
-    kind: 'clause',
-    inside: parts.every(({ inside }) => inside),
-    clause: rule.clause ?? rule.id,
-    value: shown?.value ?? 0,
-    limits: shown?.limits ?? {},
-    parts,
-  };
-}
 
 const benches = (asked: PieceAsked): BenchSituation[] => asked.situation.benches;
 const tables = (asked: PieceAsked): TableSituation[] => asked.situation.tables;
@@ -102,6 +56,19 @@ export const accessibleBenchBack: PieceCheck = {
       part('length of the back', back.lengthMm, length),
     ];
   }),
+};
+
+/**
+ * Clear floor beside the end of an accessible bench.
+ *
+ * @source rule ACC-04
+ */
+export const accessibleBenchEnd: PieceCheck = {
+  id: 'ACC-04',
+  ask: accessibleOnly('bench', benches, ({ endSpace }, rule, part) => [
+    part('clear floor away from the end', endSpace?.widthMm ?? 0, { lower: ruleNumber(rule, 'width') }),
+    part('clear floor along the end', endSpace?.lengthMm ?? 0, { lower: ruleNumber(rule, 'length') }),
+  ]),
 };
 
 /**

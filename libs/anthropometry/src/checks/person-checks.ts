@@ -1,6 +1,7 @@
+import { lensAtEye, viewOverSill, viewPastSill } from './eye-checks.ts';
 import type { PersonCheck } from './person-check.ts';
 import { backHeight, hipWidth, seatDepth, seatHeight } from './seat-checks.ts';
-import { elbowToSill, elbowToWall, headroom, sillReach, viewOverSill } from './side-checks.ts';
+import { elbowToSill, elbowToWall, headroom, sillReach, standingUp } from './side-checks.ts';
 import { bellyRoom, footDepth, kneeDepth, kneeRoom, tableHeight, thighRoom } from './table-checks.ts';
 
 /** Rules asked of every sitter, in the order of the sheet's columns. */
@@ -15,9 +16,12 @@ export const PERSON_CHECKS: readonly PersonCheck[] = [
   elbowToSill,
   sillReach,
   viewOverSill,
+  viewPastSill,
   kneeDepth,
   footDepth,
   headroom,
+  standingUp,
+  lensAtEye,
   backHeight,
   elbowToWall,
 ];

@@ -1,3 +1,4 @@
+import type { AppleBoxes } from './apple-boxes.ts';
 import type { Body } from '../people/body.ts';
 import type { BodyModel } from '../people/body-model.ts';
 import { fixed } from './amount.ts';
@@ -13,6 +14,14 @@ export interface CheckSettings {
   backPosture: 'dining' | 'lounge';
   /** Who passes behind loose seats (EGRESS-02). */
   trafficBehind: 'none' | 'edge-past' | 'walk-past' | 'wheelchair';
+  /** Height of the lens over the floor, millimetres; absent or null where no camera is asked about (HEAD-05). */
+  lensHeightMm?: number | null;
+  /** How many apple boxes of each size are at hand; absent or null where eye lines are not asked about (HEAD-04). */
+  appleBoxes?: AppleBoxes | null;
+  /** The door on the way in: clear width and depth of the opening, millimetres (ACC-09). */
+  door?: { clearWidthMm: number; depthMm: number } | null;
+  /** Spaces kept among fixed seats for people who bring a wheelchair (ACC-10). */
+  wheelchairSpaces?: number | null;
   /** Probability from which a verdict is given; the rule book's when absent. */
   confidence?: number;
 }
@@ -50,6 +59,11 @@ export interface PieceCheck {
   id: string;
   ask: (asked: PieceAsked) => PieceAnswer[];
 }
+
+/** The single answer of a rule that lacks something the crew would have to say. */
+export const notAsked = (reason: string): PieceAnswer[] => [
+  { pieceIds: [], marks: [], said: { kind: 'notAsked', reason } },
+];
 
 /** The single answer of a rule that finds nothing to look at. */
 export const nothing = (reason: string): PieceAnswer[] => [

@@ -3,6 +3,7 @@ import {
   clothingOf,
   measureEntry,
   pressedSeat,
+  shoeEntry,
   type Answer,
   type Asked,
   type PersonCheck,
@@ -17,7 +18,7 @@ import type { Question } from './verdict.ts';
 const BEHIND = 'the sill is behind the back';
 
 /** Asks once for each sill beside the place. */
-function besideSills(asked: Asked, ask: (sill: SillSituation) => Question): Said {
+export function besideSills(asked: Asked, ask: (sill: SillSituation) => Question): Said {
   const { sills } = asked.place;
   if (sills.length === 0) return { reason: 'no sill' };
   const answers: Answer[] = [];
@@ -106,36 +107,6 @@ export const sillReach: PersonCheck = {
 };
 
 /**
- * View over the sill: the eye of a sitter at ease over the sill's top.
- *
- * @source rule SILL-05
- */
-export const viewOverSill: PersonCheck = {
-  id: 'SILL-05',
-  ask: (asked) =>
-    besideSills(asked, (sill) => {
-      const { rule, body } = asked;
-      const { height, ledger } = pressedSeat(asked, 'hip');
-      const slump = ruleNumber(rule, 'slump');
-      const pass = ruleNumber(rule, 'pass');
-      const entries: Entry[] = [
-        ['seat', height],
-        measureEntry(body, 'eye_height_sitting'),
-        ['sitting at ease', fixed(-slump)],
-        [`less the top of ${sill.mark}`, fixed(-sill.topMm)],
-      ];
-      return question({
-        value: entries.reduce((sum, [, amount]) => plus(sum, amount), fixed(0)),
-        setLedger: () => [...ledger(), ...ledgerOf(entries, 'eye over the sill')],
-        lower: {
-          pass: [['set by the rule', fixed(pass)]],
-          further: allowance(ruleNumber(rule, 'fail') - pass),
-        },
-      });
-    }),
-};
-
-/**
  * Headroom: pressed seat to what hangs above.
  *
  * @source rules HEAD-02 (a person) and HEAD-01 (the public)
@@ -173,6 +144,44 @@ function headAnswer(asked: Asked, extras: [label: string, number: string][]): Sa
         lower: { pass: [measureEntry(asked.body, 'sitting_height'), ...more], further: allowance(-total) },
       }),
       pieces: [{ pieceId: overhead.pieceId, mark: overhead.mark }],
+    },
+  ];
+}
+
+/**
+ * Standing up: what hangs over the floor before the seat. A person's own line is stature, shoe and room to move; the
+ * public is read against the height of a passage.
+ *
+ * @source rule HEAD-03
+ */
+export const standingUp: PersonCheck = {
+  id: 'HEAD-03',
+  ask: (asked) =>
+    standingAnswer(asked, {
+      pass: [measureEntry(asked.body, 'stature'), shoeEntry(asked), roomEntry(asked.rule)],
+    }),
+  askPublic(asked) {
+    const { rule, model } = asked;
+    const tall = model.percentile('men', 'stature', ruleNumber(rule, 'largePercentile'));
+    return standingAnswer(asked, {
+      pass: [['height of a passage', fixed(ruleNumber(rule, 'pass'))]],
+      fail: [['Stature', fixed(tall)], ['shoe', fixed(ruleNumber(rule, 'shoe'))], roomEntry(rule)],
+    });
+  },
+};
+
+function standingAnswer({ place }: Asked, lower: Side): Said {
+  const { overheadAhead } = place;
+  if (!overheadAhead) return { reason: 'nothing overhead before the seat' };
+  const { pieceId, mark, undersideMm } = overheadAhead;
+  return [
+    {
+      question: question({
+        value: fixed(undersideMm),
+        setLedger: () => ledgerOf([[`Underside of ${mark}`, fixed(undersideMm)]], 'room over the floor'),
+        lower,
+      }),
+      pieces: [{ pieceId, mark }],
     },
   ];
 }

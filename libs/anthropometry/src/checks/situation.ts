@@ -76,6 +76,8 @@ export interface PlaceSituation {
   sills: SillSituation[];
   table: PlaceTableSituation | undefined;
   overhead: OverheadSituation | undefined;
+  /** The lowest thing over the floor just before the seat, where one stands up; absent under an open ceiling. */
+  overheadAhead?: OverheadSituation | undefined;
 }
 
 /** A bench as a whole. */
@@ -97,6 +99,15 @@ export interface BenchSituation {
         fixedToWall: boolean;
       }
     | undefined;
+  /** Curve of the back: its apex over the pressed seat, 0 for a flat back, and how far the back gives way below. */
+  lumbar?: { apexMm: number; recessMm: number } | undefined;
+  /**
+   * Most people that somebody on the bench slides past to get out; `undefined` when there is no way out at either end
+   * or forwards.
+   */
+  slidePast?: number | undefined;
+  /** Clear floor beside the end of the bench that has more of it: across, away from the end, and along the end. */
+  endSpace?: { widthMm: number; lengthMm: number } | undefined;
 }
 
 /** A table as a whole. */
@@ -146,10 +157,35 @@ export interface CornerSituation {
 
 /** A way people go through. */
 export interface WaySituation {
-  kind: 'between-tables' | 'behind-seat';
+  kind: 'between-tables' | 'behind-seat' | 'chairs-both-sides';
   pieceIds: string[];
   marks: string[];
   widthMm: number;
+}
+
+/** The lane between a row of seats and the row ahead of it. */
+export interface RowSituation {
+  pieceIds: [string, string];
+  marks: [string, string];
+  /** Seat front to the back of the row ahead. */
+  clearMm: number;
+  seats: number;
+  /** Ends of the row from which one can leave it. */
+  openEnds: 0 | 1 | 2;
+}
+
+/** A stretch of a way with one clear width. */
+export interface RouteStretch {
+  widthMm: number;
+  lengthMm: number;
+}
+
+/** Clear floor around the spot that the set keeps for turning round. */
+export interface TurningSituation {
+  /** Largest circle around the spot that nothing stands in. */
+  circleMm: number;
+  /** Widest arm of a T within a square around the spot, base and arms of one width; 0 where there is none. */
+  teeArmMm: number;
 }
 
 /** Everything the checks read of one set. */
@@ -160,4 +196,10 @@ export interface SetSituation {
   facing: FacingSituation[];
   corners: CornerSituation[];
   ways: WaySituation[];
+  /** Rows of seats one behind another. */
+  rows?: RowSituation[];
+  /** The route that the set marks, from its start to its end; absent where none is marked. */
+  route?: RouteStretch[] | undefined;
+  /** Absent where no spot is marked. */
+  turning?: TurningSituation | undefined;
 }
