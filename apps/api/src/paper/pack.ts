@@ -1,8 +1,8 @@
 import { createHash } from 'node:crypto';
 import { jsPDF } from 'jspdf';
-import { printable } from './printable';
+import { documentWords } from './lettering/document-words';
+import { findableLetters } from './lettering/faces';
 import { Sheet } from './sheet';
-import { registerWorkSans } from './work-sans';
 
 export type Paper = 'a4' | 'letter';
 
@@ -20,10 +20,10 @@ export interface PackOptions {
 /** A PDF of landscape sheets. The same sheets and options give the same bytes. */
 export class Pack {
   private readonly doc: jsPDF;
-  private sheets = 0;
+  private readonly sheets: Sheet[] = [];
 
   get sheetCount(): number {
-    return this.sheets;
+    return this.sheets.length;
   }
 
   constructor(private readonly options: PackOptions) {
@@ -34,11 +34,10 @@ export class Pack {
       putOnlyUsedFonts: true,
       compress: true,
     });
-    registerWorkSans(this.doc);
     this.doc.setProperties({
-      title: printable(options.title),
-      author: printable(options.author),
-      subject: printable(options.subject),
+      title: documentWords(options.title),
+      author: documentWords(options.author),
+      subject: documentWords(options.subject),
       creator: 'Settlewright',
     });
     this.doc.setLanguage('en-US');
@@ -49,21 +48,22 @@ export class Pack {
 
   addSheet(): Sheet {
     const [width, height] = SIZES[this.options.paper];
-    if (this.sheets > 0) this.doc.addPage([width, height], 'landscape');
-    this.sheets += 1;
-    return new Sheet(this.doc, width, height);
+    if (this.sheets.length > 0) this.doc.addPage([width, height], 'landscape');
+    const sheet = new Sheet(this.doc, width, height);
+    this.sheets.push(sheet);
+    return sheet;
   }
 
   /** Calls back once for every sheet in order, when it is known how many there are. */
   eachSheet(finish: (sheet: Sheet, number: number, count: number) => void): void {
-    const [width, height] = SIZES[this.options.paper];
-    for (let number = 1; number <= this.sheets; number++) {
-      this.doc.setPage(number);
-      finish(new Sheet(this.doc, width, height), number, this.sheets);
-    }
+    this.sheets.forEach((sheet, index) => {
+      this.doc.setPage(index + 1);
+      finish(sheet, index + 1, this.sheets.length);
+    });
   }
 
   bytes(): Buffer {
+    findableLetters(this.doc);
     return Buffer.from(this.doc.output('arraybuffer'));
   }
 }

@@ -1,6 +1,8 @@
-import { printable } from './printable';
+import { clusters } from './lettering/clusters';
+import type { Weight } from './lettering/faces';
+import { printable } from './lettering/printable';
+import { directionOf } from './lettering/text-runs';
 import { leading, type Sheet, type TextStyle } from './sheet';
-import type { Weight } from './work-sans';
 
 /** A stretch of text in one weight. */
 interface Run {
@@ -49,10 +51,11 @@ export function paragraph(
   style: TextStyle = {},
 ): number {
   let baseline = y;
+  const direction = directionOf(typeof prose === 'string' ? prose : prose.map(({ text }) => text).join(' '));
   for (const line of breakLines(sheet, prose, width, style)) {
     let at = x;
     for (const piece of joined(line)) {
-      const pieceStyle = { ...style, weight: piece.weight };
+      const pieceStyle = { ...style, direction, weight: piece.weight };
       sheet.text(piece.text, at, baseline, pieceStyle);
       at += sheet.measure(piece.text, pieceStyle);
     }
@@ -106,7 +109,7 @@ function cut(sheet: Sheet, word: string, width: number, style: TextStyle): strin
   if (sheet.measure(word, style) <= width) return [word];
   const bits: string[] = [];
   let bit = '';
-  for (const character of word) {
+  for (const character of clusters(word)) {
     if (bit !== '' && sheet.measure(bit + character, style) > width) {
       bits.push(bit);
       bit = '';

@@ -1,11 +1,9 @@
 import type { jsPDF } from 'jspdf';
-import { printable } from './printable';
-import { useWorkSans, type Weight } from './work-sans';
+import { type Weight, useFace } from './lettering/faces';
+import { printable, ROMANISED } from './lettering/printable';
+import { type Direction, runWidth, textRuns } from './lettering/text-runs';
 
 const MM_PER_POINT = 25.4 / 72;
-
-/** The face never changes, and has a few hundred characters: measured once each. */
-const ADVANCES: Record<Weight, Map<string, number>> = { 300: new Map(), 400: new Map(), 600: new Map() };
 
 /** Line weights in millimetres, from guide line to what a section cuts. */
 export const PEN = { hair: 0.14, fine: 0.18, edge: 0.36, frame: 0.42, cut: 0.8 } as const;
@@ -17,6 +15,8 @@ export interface TextStyle {
   align?: 'left' | 'center' | 'right';
   /** Anticlockwise, degrees. */
   angleDeg?: number;
+  /** Reading direction; that of the first letter when absent. */
+  direction?: Direction;
 }
 
 export interface LineStyle {
@@ -37,21 +37,34 @@ export type Point = readonly [number, number];
 
 /** One page in millimetres, y downwards, with the few marks a drawing needs. Black on white, always. */
 export class Sheet {
+  private romanised = false;
+
   constructor(
     private readonly doc: jsPDF,
     readonly widthMm: number,
     readonly heightMm: number,
   ) {}
 
+  /** Whether something on the sheet stands there romanised. */
+  get hasRomanised(): boolean {
+    return this.romanised;
+  }
+
   text(text: string, x: number, y: number, style: TextStyle = {}): void {
-    const { angleDeg = 0, align = 'left' } = style;
+    const { angleDeg = 0, align = 'left', size = 9, weight = 400, direction } = style;
     const words = printable(text);
     if (words === '') return;
-    const length = this.measure(words, style);
-    this.face(style);
-    const back = align === 'left' ? 0 : align === 'center' ? length / 2 : length;
+    this.romanised ||= words.includes(ROMANISED);
+    const back = align === 'left' ? 0 : this.measure(words, style) / (align === 'center' ? 2 : 1);
     const turn = (angleDeg * Math.PI) / 180;
-    this.doc.text(words, x - back * Math.cos(turn), y + back * Math.sin(turn), { angle: angleDeg });
+    let along = -back;
+    for (const run of textRuns(words, direction)) {
+      useFace(this.doc, run.face, weight, size);
+      const [left, baseline] = [x + along * Math.cos(turn), y - along * Math.sin(turn)];
+      // The runs stand in drawing order already: jsPDF is told to turn nothing.
+      this.doc.text(run.text, left, baseline, { angle: angleDeg, isInputVisual: true, isOutputVisual: true });
+      along += runWidth(run, weight) * size * MM_PER_POINT;
+    }
   }
 
   /** Text with a white ground under it, so that a line may run behind. */
@@ -75,9 +88,8 @@ export class Sheet {
   /** As `textWidth`, of text that is printable already. */
   measure(printed: string, style: TextStyle = {}): number {
     const { size = 9, weight = 400 } = style;
-    let points = 0;
-    for (const character of printed) points += this.advance(character, weight);
-    return points * size;
+    const points = textRuns(printed).reduce((sum, run) => sum + runWidth(run, weight), 0);
+    return points * size * MM_PER_POINT;
   }
 
   line(x1: number, y1: number, x2: number, y2: number, style: LineStyle = {}): void {
@@ -111,21 +123,6 @@ export class Sheet {
   /** Short strokes at 45 degrees along one side of an upright line: a wall that goes on. */
   hatchBeside(x: number, y1: number, y2: number, side: 1 | -1): void {
     for (let y = y1 + 1.6; y <= y2; y += 1.6) this.line(x, y, x + 1.6 * side, y - 1.6, { pen: PEN.hair });
-  }
-
-  /** Advance of one character at one point, in millimetres. */
-  private advance(character: string, weight: Weight): number {
-    const known = ADVANCES[weight].get(character);
-    if (known !== undefined) return known;
-    this.face({ size: 100, weight });
-    const width = this.doc.getTextWidth(character) / 100;
-    ADVANCES[weight].set(character, width);
-    return width;
-  }
-
-  private face({ size = 9, weight = 400 }: TextStyle): void {
-    useWorkSans(this.doc, weight);
-    this.doc.setFontSize(size);
   }
 
   private pen({ pen = PEN.fine, dash = [], grey = 0 }: LineStyle): void {

@@ -8,7 +8,6 @@ import { breakLines } from './paragraph';
 import { spaces } from './cushion-chains';
 import { Sheet, type TextStyle } from './sheet';
 import { sinkWords } from './spec-words';
-import { registerWorkSans } from './work-sans';
 
 interface Label {
   text: string;
@@ -34,7 +33,6 @@ class RememberingSheet extends Sheet {
 }
 
 const doc = new jsPDF({ unit: 'mm', putOnlyUsedFonts: true });
-registerWorkSans(doc);
 const newSheet = () => new RememberingSheet(doc, 297, 210);
 
 const overlap = (a: Label, b: Label) =>

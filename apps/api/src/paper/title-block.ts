@@ -3,6 +3,8 @@ import { leading, PEN, type Sheet } from './sheet';
 
 const MARGIN_MM = 9;
 const TITLE_BLOCK_MM = 18;
+const ROMANISED_NOTE =
+  '* romanised: this paper has no letters of that script, the screen shows it as it was typed';
 
 export interface TitleCell {
   label: string;
@@ -44,6 +46,7 @@ export function drawFrame(sheet: Sheet, cells: readonly TitleCell[]): void {
     drawCell(sheet, cell, x + 2.2, bottom, width - 4);
     x += width;
   });
+  if (sheet.hasRomanised) sheet.text(ROMANISED_NOTE, left, bottom + TITLE_BLOCK_MM + 3.4, { size: 7.5 });
 }
 
 function drawCell(sheet: Sheet, cell: TitleCell, x: number, top: number, width: number): void {
