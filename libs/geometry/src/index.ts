@@ -13,6 +13,7 @@ export * from './room/read-document.ts';
 export * from './room/seating.ts';
 export * from './room/edit-pieces.ts';
 export * from './room/align-pieces.ts';
+export * from './room/piece-groups.ts';
 export * from './room/snap-piece.ts';
 export * from './room/diff-documents.ts';
 export * from './room/merge-documents.ts';
