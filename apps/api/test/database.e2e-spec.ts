@@ -75,6 +75,31 @@ it('gives messages and events written before to the upholsterer who has the orde
   await old.destroy();
 });
 
+it('writes on sheets issued before what all verdicts asked for then, and takes it off again', async () => {
+  const old = await new DataSource(dataSourceOptions(await makeWorkerDatabase('_sheets'))).initialize();
+  await runMigrations(old);
+  const upTo = MIGRATIONS.findIndex(({ name }) => name.startsWith('ConfidenceOfAWorkshop'));
+  const back = async () => {
+    for (let count = MIGRATIONS.length; count > upTo; count -= 1) await old.undoLastMigration();
+  };
+  await back();
+  await old.transaction(async (manager) => {
+    await manager.query('SET LOCAL session_replication_role = replica');
+    await manager.query(
+      `INSERT INTO set_revisions (set_id, ordinal, letter, draft_number, document, fit_sheet, counts, note, issued_by_id)
+       VALUES ($1, 1, 'A', 1, '{}', '{"rows": []}', '{}', '', $1)`,
+      [randomUUID()],
+    );
+  });
+  const sheets = () => old.query('SELECT fit_sheet FROM set_revisions');
+  await runMigrations(old);
+  expect(await sheets()).toEqual([{ fit_sheet: { rows: [], confidence: 0.9 } }]);
+  await expect(old.query('UPDATE set_revisions SET fit_sheet = NULL')).rejects.toThrow(/cannot be changed/);
+  await back();
+  expect(await sheets()).toEqual([{ fit_sheet: { rows: [] } }]);
+  await old.destroy();
+});
+
 it('keeps migrations in the order of their times', () => {
   const times = MIGRATIONS.map((migration) => Number(migration.name.slice(-13)));
   expect(times).toEqual([...times].sort((one, other) => one - other));

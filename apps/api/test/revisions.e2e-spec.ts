@@ -199,6 +199,7 @@ describe('revisions and fit sheets', () => {
       expect(Object.keys(sheet).sort()).toEqual(
         [
           'bodies',
+          'confidence',
           'counts',
           'detail',
           'emptyPlaceIds',

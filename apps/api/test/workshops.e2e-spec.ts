@@ -22,6 +22,8 @@ describe('a workshop', () => {
       telephone: '',
       paper: 'letter',
       timeZone: 'UTC',
+      confidence: null,
+      confidenceSetAt: null,
       isDemo: false,
       role: 'owner',
     });

@@ -44,7 +44,7 @@ const mannequin = (percentile: number): SitterRef => ({
 describe('fit sheets made on the server', () => {
   it('name cast members and mannequins', () => {
     const sitters = [{ kind: 'cast' as const, castId: HETTY.id }, ...[1, 2, 95].map(mannequin)];
-    const { rows } = fit.sheetFor(withSitters(...sitters), [HETTY]);
+    const { rows } = fit.sheetFor(withSitters(...sitters), [HETTY], null);
     expect(rows.map(({ name }) => name)).toEqual([
       'Hetty Vance',
       'Woman, 1st in stature',
@@ -54,7 +54,7 @@ describe('fit sheets made on the server', () => {
   });
 
   it('leave out a person who is not known', () => {
-    const sheet = fit.sheetFor(withSitters({ kind: 'cast', castId: HETTY.id }), []);
+    const sheet = fit.sheetFor(withSitters({ kind: 'cast', castId: HETTY.id }), [], null);
     expect(sheet.rows).toEqual([]);
     expect(Object.values(sheet.counts)).toEqual([0, 0, 0, 0]);
   });

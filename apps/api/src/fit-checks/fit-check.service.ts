@@ -27,13 +27,14 @@ export class FitCheckService {
   readonly ruleBook: RuleBook = loadRuleBook(readData('fit-rules'));
   private readonly model: BodyModel = createBodyModel(readData('populations/ansur2'));
 
-  sheetFor(document: SetDocument, cast: readonly CastPerson[]): FitSheet {
+  /** `confidence` is what the workshop asks of a verdict; null: as much as the rule book does. */
+  sheetFor(document: SetDocument, cast: readonly CastPerson[], confidence: number | null): FitSheet {
     return checkSet({
       situation: measureSet(document),
       sitters: this.sitters(document, cast),
       ruleBook: this.ruleBook,
       model: this.model,
-      settings: document.asked,
+      settings: { ...document.asked, ...(confidence === null ? {} : { confidence }) },
     });
   }
 

@@ -15,7 +15,7 @@ const MORE_HEAD = [
 ];
 
 /** One line for each check. Numbers are plain, in the unit of their line; a margin below zero is missing room. */
-export function fitSheetCsv(sheet: ShownSheet, ruleBook: RuleBook): string {
+export function fitSheetCsv(sheet: ShownSheet, ruleBook: RuleBook, confidence: string): string {
   const line = (
     section: string,
     sitter: string,
@@ -39,6 +39,7 @@ export function fitSheetCsv(sheet: ShownSheet, ruleBook: RuleBook): string {
     ),
     ...sheet.publicRow.cells.map((cell) => line('public', cell.readAs, cell.marks.join(' '), '', cell)),
     ...sheet.piecesAndWays.map((cell) => line('pieces and ways', '', cell.marks.join(' '), '', cell)),
+    ['note', confidence],
     ['note', CAUTION],
   ]);
 }

@@ -1,4 +1,10 @@
-import type { FitSheet, Rule, RuleBook, Verdict } from '@settlewright/anthropometry';
+import {
+  confidenceWords,
+  type FitSheet,
+  type Rule,
+  type RuleBook,
+  type Verdict,
+} from '@settlewright/anthropometry';
 import type { OpenCell, VerdictSheet } from './verdicts-only';
 
 /** A fit sheet to print or export, with or without the numbers behind the verdicts. */
@@ -15,6 +21,25 @@ export const VERDICT_WORDS: Record<Verdict, string> = {
 export const CAUTION =
   'Guidance, not certification. Local codes and the authority having jurisdiction decide. ' +
   'Body data describe surveyed groups, not a person: try the seat.';
+
+/** When the probability that a sheet's verdicts ask for came into force, as far as anybody set it. */
+export interface ConfidenceSince {
+  kind: 'set' | 'issued';
+  at: Date;
+}
+
+/** What a sheet says of the probability that its verdicts ask for. */
+export function confidenceSentence(
+  sheet: ShownSheet,
+  ruleBook: RuleBook,
+  since: ConfidenceSince | null,
+  timeZone: string,
+): string {
+  if (since === null) return confidenceWords(sheet.confidence, ruleBook);
+  const day = new Intl.DateTimeFormat('en-GB', { dateStyle: 'long', timeZone }).format(since.at);
+  const happened = since.kind === 'issued' ? 'as in force when issued' : 'set by the workshop';
+  return confidenceWords(sheet.confidence, ruleBook, `${happened} on ${day}`);
+}
 
 /** The rule of a cell; a revision of long ago may name one that the rule book no longer has. */
 export function ruleOf(ruleBook: RuleBook, { ruleId }: { ruleId: string }): Rule | undefined {

@@ -14,6 +14,7 @@ function shown(outcome: Partial<VerdictOutcome>, unit = 'mm') {
     piecesAndWays: [cell as FitCell],
     emptyPlaceIds: [],
     counts: { fits: 0, tight: 0, wontFit: 0, notKnown: 0 },
+    confidence: 0.9,
     ruleVersion: '1',
   };
   const seen = verdictsOnly(sheet, ruleBook).piecesAndWays[0]!.outcome;

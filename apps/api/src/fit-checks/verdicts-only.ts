@@ -45,6 +45,7 @@ export function verdictsOnly(sheet: FitSheet, ruleBook: RuleBook): VerdictSheet 
     piecesAndWays: sheet.piecesAndWays.map(openCell),
     emptyPlaceIds: sheet.emptyPlaceIds,
     counts: sheet.counts,
+    confidence: sheet.confidence,
     ruleVersion: sheet.ruleVersion,
   };
 }

@@ -45,6 +45,7 @@ const sheet: FitSheet = {
   ],
   emptyPlaceIds: [],
   counts: { fits: 0, tight: 2, wontFit: 0, notKnown: 0 },
+  confidence: 0.9,
   ruleVersion: '1',
 };
 const numbersOf = ({ outcome: said }: FitCell) => JSON.stringify(said).match(/\d+\.\d+/g) ?? [];

@@ -7,6 +7,7 @@ import { copyName } from '../common/copy-name';
 import type { Page } from '../common/page.dto';
 import { Problem } from '../common/problem';
 import { readPage } from '../common/read-page';
+import type { Workshop } from '../workshops/entities/workshop.entity';
 import type { CreateProductionDto, PatchProductionDto, ProductionQuery } from './dto/production.dto';
 import { Production } from './entities/production.entity';
 
@@ -33,6 +34,19 @@ export class ProductionsService {
     const production = await this.forReading(member, productionId);
     if (production.archivedAt) throw productionArchived();
     return production;
+  }
+
+  /** Whose settings hold in a production. For other modules. */
+  async workshopOf(
+    productionId: string,
+    manager: EntityManager = this.productions.manager,
+  ): Promise<Workshop> {
+    const { workshop } = await manager.findOneOrFail(Production, {
+      where: { id: productionId },
+      relations: { workshop: true },
+    });
+    if (!workshop) throw new Error(`production ${productionId} has no workshop`);
+    return workshop;
   }
 
   /** Keeps other writers who ask for the same from the production's people until the transaction ends. */

@@ -6,6 +6,7 @@ import { type CastPerson, castPerson } from '../cast/known-person';
 import type { MemberInfo } from '../common/access.decorator';
 import { Problem } from '../common/problem';
 import { FitCheckService } from '../fit-checks/fit-check.service';
+import { ProductionsService } from '../productions/productions.service';
 import { DraftDto, type SaveDraftDto } from './dto/draft.dto';
 import { DesignedSet } from './entities/designed-set.entity';
 import { type Counts, SetDraft } from './entities/set-draft.entity';
@@ -25,6 +26,7 @@ export class DraftsService {
     private readonly access: SetAccess,
     private readonly people: SeatedPeople,
     private readonly fit: FitCheckService,
+    private readonly productions: ProductionsService,
   ) {}
 
   async get(member: MemberInfo, productionId: string, setId: string): Promise<SetDraft> {
@@ -109,7 +111,7 @@ export class DraftsService {
     return document;
   }
 
-  /** The drafts in force of several sets; counts older than the newest change of a person are made again. */
+  /** The drafts in force of several sets; counts older than what they rest on are made again. */
   async withFreshCounts(productionId: string, sets: DesignedSet[]): Promise<Map<string, SetDraft>> {
     if (sets.length === 0) return new Map();
     const found = await this.drafts.find({
@@ -120,12 +122,14 @@ export class DraftsService {
       productionId,
       found.map(({ document }) => document),
     );
+    const { confidence, confidenceSetAt } = await this.productions.workshopOf(productionId);
+    const setAt = confidenceSetAt?.getTime() ?? 0;
     for (const draft of found) {
       const ids = new Set(castIdsOf(draft.document));
       const changes = people.filter(({ id }) => ids.has(id)).map(({ updatedAt }) => updatedAt.getTime());
-      const changedAt = Math.max(draft.savedAt.getTime(), ...changes);
+      const changedAt = Math.max(draft.savedAt.getTime(), setAt, ...changes);
       if (draft.countedAt.getTime() >= changedAt) continue;
-      draft.counts = this.countsOf(draft.document, people.map(castPerson));
+      draft.counts = this.countsOf(draft.document, people.map(castPerson), confidence);
       draft.countedAt = new Date(changedAt);
       const { setId, number, counts, countedAt } = draft;
       await this.drafts.update({ setId, number }, { counts, countedAt });
@@ -134,9 +138,9 @@ export class DraftsService {
   }
 
   /** A list is never lost because the checks of one set could not be made. */
-  private countsOf(document: SetDocument, people: CastPerson[]): Counts | null {
+  private countsOf(document: SetDocument, people: CastPerson[], confidence: number | null): Counts | null {
     try {
-      return this.fit.sheetFor(document, people).counts;
+      return this.fit.sheetFor(document, people, confidence).counts;
     } catch (fault) {
       this.logger.error(fault instanceof Error ? fault.stack : fault);
       return null;

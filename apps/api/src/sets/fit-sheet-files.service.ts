@@ -4,7 +4,9 @@ import { FitCheckService } from '../fit-checks/fit-check.service';
 import { fitSheetCsv } from '../fit-checks/fit-sheet-csv';
 import type { FitSheetPaper } from '../fit-checks/paper/fit-sheet-paper';
 import { fitSheetPdf } from '../fit-checks/paper/fit-sheet-pdf';
+import { type ConfidenceSince, confidenceSentence } from '../fit-checks/shown-sheet';
 import { ProductionsService } from '../productions/productions.service';
+import type { Workshop } from '../workshops/entities/workshop.entity';
 import { WorkshopsService } from '../workshops/workshops.service';
 import { FitSheetsService, type SeenSheet } from './fit-sheets.service';
 import { RevisionsService } from './revisions.service';
@@ -17,7 +19,7 @@ export interface SheetPlace {
   letter?: string;
 }
 
-type Source = Pick<FitSheetPaper, 'state' | 'at' | 'by'> & { shown: SeenSheet };
+type Source = Pick<FitSheetPaper, 'state' | 'at' | 'by' | 'confidence'> & { shown: SeenSheet };
 
 /** Fit sheets to keep or print, with as much in them as the caller may see. */
 @Injectable()
@@ -33,15 +35,16 @@ export class FitSheetFilesService {
 
   async csv(member: MemberInfo, place: SheetPlace): Promise<{ name: string; content: string }> {
     const set = await this.access.forReading(member, place.productionId, place.setId);
-    const { shown, state } = await this.source(member, place);
-    return { name: fileName(set.name, state), content: fitSheetCsv(shown, this.fit.ruleBook) };
+    const workshop = await this.workshops.get(member.workshopId);
+    const { shown, state, confidence } = await this.source(member, place, workshop);
+    return { name: fileName(set.name, state), content: fitSheetCsv(shown, this.fit.ruleBook, confidence) };
   }
 
   async pdf(member: MemberInfo, place: SheetPlace): Promise<{ name: string; content: Buffer }> {
     const set = await this.access.forReading(member, place.productionId, place.setId);
     const production = await this.productions.forReading(member, place.productionId);
     const workshop = await this.workshops.get(member.workshopId);
-    const { shown, ...source } = await this.source(member, place);
+    const { shown, ...source } = await this.source(member, place, workshop);
     const content = fitSheetPdf({
       sheet: shown,
       ruleBook: this.fit.ruleBook,
@@ -56,19 +59,29 @@ export class FitSheetFilesService {
     return { name: fileName(set.name, source.state), content };
   }
 
-  private async source(member: MemberInfo, { productionId, setId, letter }: SheetPlace): Promise<Source> {
+  private async source(
+    member: MemberInfo,
+    { productionId, setId, letter }: SheetPlace,
+    { confidenceSetAt, timeZone }: Workshop,
+  ): Promise<Source> {
+    const { ruleBook } = this.fit;
     if (letter === undefined) {
       const { draft, shown } = await this.fitSheets.ofDraft(member, productionId, setId);
+      const since: ConfidenceSince | null = confidenceSetAt && { kind: 'set', at: confidenceSetAt };
       return {
         shown,
+        confidence: confidenceSentence(shown, ruleBook, since, timeZone),
         state: { kind: 'draft', number: draft.number },
         at: draft.savedAt,
         by: draft.savedBy?.name ?? '',
       };
     }
     const revision = await this.revisions.find(member, productionId, setId, letter);
+    const shown = await this.fitSheets.ofRevision(member, productionId, revision);
+    const since: ConfidenceSince = { kind: 'issued', at: revision.issuedAt };
     return {
-      shown: await this.fitSheets.ofRevision(member, productionId, revision),
+      shown,
+      confidence: confidenceSentence(shown, ruleBook, since, timeZone),
       state: { kind: 'revision', letter: revision.letter },
       at: revision.issuedAt,
       by: revision.issuedBy?.name ?? '',

@@ -7,6 +7,7 @@ import type { MemberInfo } from '../common/access.decorator';
 import { FitCheckService } from '../fit-checks/fit-check.service';
 import type { RoundedBody } from '../fit-checks/rounded-body';
 import { type VerdictSheet, verdictsOnly } from '../fit-checks/verdicts-only';
+import { ProductionsService } from '../productions/productions.service';
 import { DraftsService } from './drafts.service';
 import type { SetDraft } from './entities/set-draft.entity';
 import type { SetRevision } from './entities/set-revision.entity';
@@ -22,6 +23,7 @@ export class FitSheetsService {
     private readonly drafts: DraftsService,
     private readonly seated: SeatedPeople,
     private readonly fit: FitCheckService,
+    private readonly productions: ProductionsService,
   ) {}
 
   /** The sheet of the draft in force, with the cast as it is known now. */
@@ -32,7 +34,8 @@ export class FitSheetsService {
   ): Promise<{ draft: SetDraft; sheet: FitSheet; shown: SeenSheet }> {
     const draft = await this.drafts.get(member, productionId, setId);
     const people = await this.people(productionId, draft.document);
-    const sheet = this.fit.sheetFor(draft.document, people);
+    const { confidence } = await this.productions.workshopOf(productionId);
+    const sheet = this.fit.sheetFor(draft.document, people, confidence);
     return { draft, sheet, shown: this.shown(member, sheet, draft.document, people) };
   }
 

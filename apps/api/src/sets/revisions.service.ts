@@ -51,7 +51,8 @@ export class RevisionsService {
       }
       const { document } = await this.drafts.inForce(set, manager);
       const people = await this.people.of(productionId, [document], manager);
-      const fitSheet = this.fit.sheetFor(document, people.map(castPerson));
+      const { confidence } = await this.productions.workshopOf(productionId, manager);
+      const fitSheet = this.fit.sheetFor(document, people.map(castPerson), confidence);
       const ordinal = (await manager.countBy(SetRevision, { setId })) + 1;
       const revision = await manager.save(
         manager.create(SetRevision, {

@@ -46,11 +46,12 @@ export class WorkshopsController {
   @Access('owner')
   @ApiOkResponse({ type: WorkshopDto })
   async change(@Member() member: MemberInfo, @Body() changes: ChangeWorkshopDto): Promise<WorkshopDto> {
-    return present(await this.workshops.change(member.workshopId, changes), member.role);
+    return present(await this.workshops.change(member, changes), member.role);
   }
 }
 
 function present(workshop: Workshop, role: Role): WorkshopDto {
-  const { id, name, telephone, paper, timeZone, isDemo } = workshop;
-  return { id, name, telephone, paper, timeZone, isDemo, role };
+  const { id, name, telephone, paper, timeZone, confidence, isDemo } = workshop;
+  const confidenceSetAt = workshop.confidenceSetAt?.toISOString() ?? null;
+  return { id, name, telephone, paper, timeZone, confidence, confidenceSetAt, isDemo, role };
 }

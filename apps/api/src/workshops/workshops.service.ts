@@ -1,7 +1,8 @@
 import { Injectable } from '@nestjs/common';
 import { InjectDataSource } from '@nestjs/typeorm';
 import { DataSource, type EntityManager } from 'typeorm';
-import type { Role } from '../common/access.decorator';
+import { AuditService } from '../audit/audit.service';
+import type { MemberInfo, Role } from '../common/access.decorator';
 import { Problem } from '../common/problem';
 import { Membership } from './entities/membership.entity';
 import { Workshop } from './entities/workshop.entity';
@@ -13,11 +14,16 @@ export interface WorkshopOfUser {
   isDemo: boolean;
 }
 
-export type WorkshopChanges = Partial<Pick<Workshop, 'name' | 'telephone' | 'paper' | 'timeZone'>>;
+export type WorkshopChanges = Partial<
+  Pick<Workshop, 'name' | 'telephone' | 'paper' | 'timeZone' | 'confidence'>
+>;
 
 @Injectable()
 export class WorkshopsService {
-  constructor(@InjectDataSource() private readonly dataSource: DataSource) {}
+  constructor(
+    @InjectDataSource() private readonly dataSource: DataSource,
+    private readonly audit: AuditService,
+  ) {}
 
   async get(workshopId: string, manager: EntityManager = this.dataSource.manager): Promise<Workshop> {
     const workshop = await manager.findOneBy(Workshop, { id: workshopId });
@@ -67,12 +73,25 @@ export class WorkshopsService {
     return created;
   }
 
-  async change(workshopId: string, changes: WorkshopChanges): Promise<Workshop> {
+  async change({ workshopId, userId }: MemberInfo, changes: WorkshopChanges): Promise<Workshop> {
     const given = Object.fromEntries(Object.entries(changes).filter(([, value]) => value !== undefined));
-    if (Object.keys(given).length > 0) {
-      await this.dataSource.manager.update(Workshop, { id: workshopId }, given);
-    }
-    return this.get(workshopId);
+    return this.dataSource.transaction(async (manager) => {
+      const workshop = await this.lock(manager, workshopId);
+      const from = workshop.confidence;
+      Object.assign(workshop, given);
+      if (workshop.confidence !== from) {
+        workshop.confidenceSetAt = new Date();
+        await this.audit.record(manager, {
+          workshopId,
+          userId,
+          action: 'workshop.confidence-changed',
+          subjectType: 'workshop',
+          subjectId: workshopId,
+          detail: { from, to: workshop.confidence },
+        });
+      }
+      return manager.save(workshop);
+    });
   }
 
   async addMember(manager: EntityManager, workshopId: string, userId: string, role: Role): Promise<void> {

@@ -1082,6 +1082,13 @@ export interface components {
             telephone: string;
             paper: components["schemas"]["Paper"];
             timeZone: string;
+            /** @description probability that a verdict asks for; null: the default of the rule data */
+            confidence: number | null;
+            /**
+             * Format: date-time
+             * @description when the confidence was last changed
+             */
+            confidenceSetAt: string | null;
             isDemo: boolean;
             /** @description the role of whoever asks */
             role: components["schemas"]["Role"];
@@ -1092,6 +1099,8 @@ export interface components {
             paper?: components["schemas"]["Paper"];
             /** @description as `Europe/Rome` */
             timeZone?: string;
+            /** @description probability that a verdict asks for, in hundredths; null for the default of the rule data */
+            confidence?: number | null;
         };
         MemberDto: {
             /** Format: uuid */
@@ -1878,6 +1887,8 @@ export interface components {
             }[];
             emptyPlaceIds: string[];
             counts: components["schemas"]["CountsDto"];
+            /** @description probability from which its verdicts were given */
+            confidence: number;
             ruleVersion: string;
             /** @description only with `verdicts` */
             bodies?: components["schemas"]["RoundedBodyDto"][];

@@ -61,13 +61,17 @@ export function checkSet(input: CheckInput): FitSheet {
     }),
     emptyPlaceIds: situation.places.map(({ placeId }) => placeId).filter((id) => !seated.has(id)),
     counts,
+    confidence: confidenceOf(input),
     ruleVersion: ruleBook.version,
   };
 }
 
-const judgementOf = ({ ruleBook, settings }: CheckInput, rule: Rule): Judgement => ({
-  confidence: settings.confidence ?? ruleBook.confidence,
-  tolerance: ruleBook.boundaryTolerance[rule.unit],
+const confidenceOf = ({ ruleBook, settings }: CheckInput): number =>
+  settings.confidence ?? ruleBook.confidence;
+
+const judgementOf = (input: CheckInput, rule: Rule): Judgement => ({
+  confidence: confidenceOf(input),
+  tolerance: input.ruleBook.boundaryTolerance[rule.unit],
 });
 
 function rowOf(input: CheckInput, sitter: Sitter, place: PlaceSituation | undefined): SitterRow {

@@ -128,6 +128,8 @@ export interface FitSheet {
   /** Places nobody sits at. */
   emptyPlaceIds: string[];
   counts: Record<Verdict, number>;
+  /** Probability from which its verdicts were given. */
+  confidence: number;
   /** Version of the rule data the sheet was made with. */
   ruleVersion: string;
 }

@@ -10,6 +10,13 @@ export const SOURCE_MARK_WORDS: Record<SourceMark, string> = {
   'HOUSE RULE': 'shop rule',
 };
 
+/**
+ * What a workshop may ask of a verdict instead of the rule book's probability, in steps of a hundredth.
+ * Above one half, so that a seat cannot be said to fit and not to fit at once; below one, because the far
+ * ends of a surveyed group are too thin to tell one in a thousand.
+ */
+export const CONFIDENCE_LIMITS = { lowest: 0.51, highest: 0.99, decimals: 2 } as const;
+
 /** One rule as data: its words, its sources and every number it decides with. */
 export interface Rule {
   id: string;
@@ -63,6 +70,7 @@ export interface RuleBook {
   version: string;
   /** Probability from which a verdict is given. */
   confidence: number;
+  confidenceSource: Rule['sources'][number];
   /** How far past a line still counts as on it. */
   boundaryTolerance: Record<RuleUnit, number>;
   practices: Practice[];
@@ -70,6 +78,11 @@ export interface RuleBook {
   /** @throws RangeError when the book has no such rule */
   rule(id: string): Rule;
 }
+
+const sourceSchema = z.object({
+  cite: z.string().min(1),
+  mark: z.enum(['RETRIEVED', 'FROM MEMORY', 'DERIVED', 'HOUSE RULE']),
+});
 
 const ruleSchema = z.object({
   id: z.string().regex(/^[A-Z]+-\d\d$/),
@@ -80,14 +93,7 @@ const ruleSchema = z.object({
   unit: z.enum(['mm', 'deg', 'count']),
   tier: z.enum(['guidance', 'code']),
   why: z.string().min(1),
-  sources: z
-    .array(
-      z.object({
-        cite: z.string().min(1),
-        mark: z.enum(['RETRIEVED', 'FROM MEMORY', 'DERIVED', 'HOUSE RULE']),
-      }),
-    )
-    .min(1),
+  sources: z.array(sourceSchema).min(1),
   thresholdBasis: z.string().min(1),
   sourceWord: z.enum(['published source', 'common practice', 'shop rule', 'from memory']),
   clause: z.string().optional(),
@@ -110,7 +116,8 @@ const ruleSchema = z.object({
 
 const bookSchema = z.object({
   version: z.string().min(1),
-  confidence: z.number().gt(0.5).lt(1),
+  confidence: z.number().min(CONFIDENCE_LIMITS.lowest).max(CONFIDENCE_LIMITS.highest),
+  confidenceSource: sourceSchema,
   boundaryTolerance: z.object({
     mm: z.number().nonnegative(),
     deg: z.number().nonnegative(),
@@ -143,13 +150,14 @@ export function loadRuleBook(json: unknown): RuleBook {
     const [issue] = parsed.error.issues;
     throw new Error(`Fit rules: ${issue?.path.join('.') ?? ''}: ${issue?.message ?? 'not readable'}`);
   }
-  const { version, confidence, boundaryTolerance, practices, rules } = parsed.data;
+  const { version, confidence, confidenceSource, boundaryTolerance, practices, rules } = parsed.data;
   const byId = new Map(rules.map((rule) => [rule.id, rule]));
   if (byId.size !== rules.length)
     throw new Error('Fit rules: two rules carry the same id; accepted: one each');
   return {
     version,
     confidence,
+    confidenceSource,
     boundaryTolerance,
     practices,
     rules,

@@ -18,4 +18,6 @@ export interface FitSheetPaper {
   /** When it was issued, or when the draft was saved. */
   at: Date;
   by: string;
+  /** The sentence about the probability that the verdicts ask for. */
+  confidence: string;
 }

@@ -9,7 +9,7 @@ const KEY =
   '+ room left to the fail line, − short of it; est.: predicted or told, with the range that holds 90 in 100';
 const STANCE = 'cushions pressed, shoes on, backs against the rest';
 
-export function drawHeading(flow: Flow, { sheet: fit }: FitSheetPaper): void {
+export function drawHeading(flow: Flow, { sheet: fit, confidence }: FitSheetPaper): void {
   const { sheet } = flow;
   const baseline = flow.y + 7;
   sheet.text('Fit sheet', flow.left, baseline, { size: 22, weight: 300 });
@@ -25,5 +25,6 @@ export function drawHeading(flow: Flow, { sheet: fit }: FitSheetPaper): void {
   }
   sheet.text(KEY, flow.left, baseline + 6.4);
   sheet.text(STANCE, flow.right, baseline + 6.4, { align: 'right' });
-  flow.y = baseline + 9.6;
+  sheet.text(confidence, flow.left, baseline + 11);
+  flow.y = baseline + 14.2;
 }

@@ -51,6 +51,8 @@ export class FitSheetDto {
   emptyPlaceIds: string[];
   @ApiProperty({ type: CountsDto })
   counts: CountsDto;
+  @ApiProperty({ description: 'probability from which its verdicts were given' })
+  confidence: number;
   @ApiProperty()
   ruleVersion: string;
   @ApiPropertyOptional({ type: [RoundedBodyDto], description: 'only with `verdicts`' })

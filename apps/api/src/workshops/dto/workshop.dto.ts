@@ -1,7 +1,9 @@
+import { CONFIDENCE_LIMITS } from '@settlewright/anthropometry';
 import { ApiProperty, ApiPropertyOptional } from '@nestjs/swagger';
 import { IsIn, IsOptional, IsTimeZone } from 'class-validator';
 import { type Role, ROLES } from '../../common/access.decorator';
 import { Line } from '../../common/account-fields';
+import { IsConfidence } from '../confidence.decorator';
 import { type Paper, PAPERS } from '../entities/workshop.entity';
 
 export class CreateWorkshopDto {
@@ -22,6 +24,16 @@ export class ChangeWorkshopDto {
   @IsOptional()
   @IsTimeZone()
   timeZone?: string;
+  @ApiPropertyOptional({
+    type: Number,
+    nullable: true,
+    minimum: CONFIDENCE_LIMITS.lowest,
+    maximum: CONFIDENCE_LIMITS.highest,
+    description: 'probability that a verdict asks for, in hundredths; null for the default of the rule data',
+  })
+  @IsOptional()
+  @IsConfidence()
+  confidence?: number | null;
 }
 
 export class WorkshopDto {
@@ -35,6 +47,19 @@ export class WorkshopDto {
   paper: Paper;
   @ApiProperty()
   timeZone: string;
+  @ApiProperty({
+    type: Number,
+    nullable: true,
+    description: 'probability that a verdict asks for; null: the default of the rule data',
+  })
+  confidence: number | null;
+  @ApiProperty({
+    type: String,
+    format: 'date-time',
+    nullable: true,
+    description: 'when the confidence was last changed',
+  })
+  confidenceSetAt: string | null;
   @ApiProperty()
   isDemo: boolean;
   @ApiProperty({ enum: ROLES, enumName: 'Role', description: 'the role of whoever asks' })

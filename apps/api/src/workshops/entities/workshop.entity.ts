@@ -20,6 +20,14 @@ export class Workshop {
   @Column('text', { default: 'UTC' })
   timeZone: string;
 
+  /** Probability that a verdict asks for; null: as the rule data has it. */
+  @Column({ type: 'double precision', nullable: true })
+  confidence: number | null;
+
+  /** When that was last changed; null: never. Verdicts counted before are counted again. */
+  @Column({ type: 'timestamptz', nullable: true })
+  confidenceSetAt: Date | null;
+
   @Column('boolean', { default: false })
   isDemo: boolean;
 
