@@ -58,6 +58,16 @@ export * from './situation/seat-height-bands.ts';
 export { dimensionOf, dimensionsOf, type Dimension } from './choices/dimensions.ts';
 export { isGain, isLoss, sheetChanges, type CellChange, type CellState } from './choices/sheet-changes.ts';
 export { stickValues, storyStick } from './choices/story-stick.ts';
-export type { StickClause, StickRow, StoryStick, Stretch } from './choices/story-stick.ts';
+export type { StickClause, StickRow, StoryStick } from './choices/story-stick.ts';
+export type { Stretch } from './choices/stretches.ts';
 export { compareSheets } from './choices/compare-sheets.ts';
 export type { ComparedCell, ComparedSheets, ComparedSitter } from './choices/compare-sheets.ts';
+export {
+  documentAt,
+  type FreeDimension,
+  type Miss,
+  type SuggestInput,
+  type Tried,
+} from './choices/candidates.ts';
+export { suggestDimensions } from './choices/suggest-dimensions.ts';
+export type { Answer, AnswerKind, Blame, Suggestion } from './choices/suggest-dimensions.ts';

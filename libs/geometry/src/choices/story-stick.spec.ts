@@ -81,7 +81,7 @@ const stickOf = (dimension: Dimension, ruleId?: string): StoryStick =>
   run(
     storyStick({
       dimension,
-      values: stickValues(dimension, INCH / 8),
+      values: stickValues(dimension, INCH / 2),
       check,
       ...(ruleId === undefined ? {} : { ruleId }),
     }),
