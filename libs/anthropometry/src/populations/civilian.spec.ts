@@ -89,7 +89,7 @@ describe.each([
   });
 });
 
-it('is what the script makes of the rows', ({ skip }) => {
+it('is what the script makes of the rows', { timeout: 60_000 }, ({ skip }) => {
   const script = fileURLToPath(new URL('../../../../scripts/make-civilian-population.mjs', import.meta.url));
   const { status, stdout, stderr } = spawnSync(process.execPath, [script, '--print'], { encoding: 'utf8' });
   if (status === 2) {
