@@ -1,6 +1,6 @@
 import type { FitSheet } from '@settlewright/anthropometry';
 import type { SetDocument } from '../room/document.ts';
-import type { Dimension } from './dimensions.ts';
+import type { Dimension } from './dimension.ts';
 import { stateOf } from './sheet-changes.ts';
 
 /** A dimension that may be chosen, and how far. */

@@ -15,7 +15,8 @@ import type { SetDocument } from '../room/document.ts';
 import { emptySetDocument } from '../room/read-document.ts';
 import { measureSet } from '../situation/measure-set.ts';
 import { seatHeightNeeds } from '../situation/seat-height-bands.ts';
-import { dimensionOf, dimensionsOf, type Dimension } from './dimensions.ts';
+import type { Dimension } from './dimension.ts';
+import { dimensionOf, dimensionsOf } from './dimensions.ts';
 import { stickValues, storyStick, type StoryStick } from './story-stick.ts';
 
 const ruleBook = loadRuleBook(rules);

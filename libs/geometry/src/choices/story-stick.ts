@@ -1,6 +1,6 @@
 import type { FitCell, FitSheet, SitterRow, VerdictOutcome } from '@settlewright/anthropometry';
 import type { SetDocument } from '../room/document.ts';
-import type { Dimension } from './dimensions.ts';
+import type { Dimension } from './dimension.ts';
 import { common, stretches, type Stretch } from './stretches.ts';
 import { cellsOf, STATE_RANK, stateOf, type CellState } from './sheet-changes.ts';
 

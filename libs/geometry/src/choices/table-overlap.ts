@@ -3,7 +3,7 @@ import type { SetDocument } from '../room/document.ts';
 import { movePiece } from '../room/edit-pieces.ts';
 import { measureSet } from '../situation/measure-set.ts';
 import { HAND_MM } from './dimension-kinds.ts';
-import type { Dimension } from './dimensions.ts';
+import type { Dimension } from './dimension.ts';
 
 const OVERLAP = 'table-overlap';
 
