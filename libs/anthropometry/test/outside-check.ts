@@ -36,9 +36,9 @@ export function outsideCheck(check: OutsideCheck): void {
   expect(difference, said).toBeLessThanOrEqual(check.tolerance);
 }
 
-/** What names a check and its demand; what we give may move without the list going stale. */
+/** What names a check and its demand, spaced as the page is; what we give may move without the list going stale. */
 const demand = ({ source, what, expected, tolerance, unit }: Omit<OutsideCheck, 'ours'>) =>
-  [source, what, `${expected}`, `${tolerance}`, unit].join(' | ');
+  [source, what, `${expected}`, `${tolerance}`, unit].join(' | ').replaceAll(/ +/g, ' ');
 
 let file: Task | undefined;
 afterEach(({ task }) => {
@@ -76,7 +76,7 @@ function listedFor(spec: string): string[] {
     const [source = '', what = '', expected, , , tolerance, unit = ''] = line
       .split('|')
       .slice(1)
-      .map((cell) => cell.trim());
+      .map((cell) => cell.trim().replaceAll('\\', ''));
     return demand({
       source,
       what,

@@ -2,21 +2,20 @@ import type { MeasureKey } from '../measures/measures.ts';
 import { drawOrder, factorRows, linearBodies } from './linear-bodies.ts';
 import { populationOf } from './mix.ts';
 import type { GroupBodies, Population, PopulationDetails } from './population.ts';
-import type { MeasureStatistics, Survey, SurveyGroup } from './survey.ts';
+import type { Survey, SurveyGroup } from './survey.ts';
 import { isLogged, type Worked } from './worked.ts';
+
+/** Least and greatest value by measure: millimetres, kilograms for weight. */
+export type Ranges = Readonly<Partial<Record<MeasureKey, { min: number; max: number }>>>;
 
 /**
  * People of one sex from a worked normal.
  *
  * @param group - women or men
  * @param worked - means and covariances in worked form
- * @param ranges - observed range by measure; drawn values beyond are set to its end
+ * @param ranges - of the measures; drawn values beyond are set to its end
  */
-export function workedBodies(
-  group: SurveyGroup,
-  worked: Worked,
-  ranges: Record<MeasureKey, Pick<MeasureStatistics, 'min' | 'max'>>,
-): GroupBodies {
+export function workedBodies(group: SurveyGroup, worked: Worked, ranges: Ranges): GroupBodies {
   const keys = drawOrder(worked.keys);
   const size = keys.length;
   const places = keys.map((key) => worked.keys.indexOf(key));
@@ -29,16 +28,14 @@ export function workedBodies(
   const factors = factorRows(covariance, size);
   return linearBodies(
     group,
-    keys.map((key, i) => {
-      return {
-        key,
-        mean: worked.mean[places[i] as number] as number,
-        factors: factors[i] as Float64Array,
-        logged: isLogged(key),
-        low: ranges[key].min,
-        high: ranges[key].max,
-      };
-    }),
+    keys.map((key, i) => ({
+      key,
+      mean: worked.mean[places[i] as number] as number,
+      factors: factors[i] as Float64Array,
+      logged: isLogged(key),
+      low: ranges[key]?.min ?? -Infinity,
+      high: ranges[key]?.max ?? Infinity,
+    })),
   );
 }
 
