@@ -43,7 +43,7 @@ function inFaces(plain: string): string {
     foreign = gap = '';
   };
   for (const cluster of clusters(withoutPoints(plain))) {
-    const drawn = drawable(cluster);
+    const drawn = drawable(cluster) ?? stopOf(cluster);
     if (drawn === undefined) {
       foreign += gap + cluster;
       gap = '';
@@ -55,6 +55,11 @@ function inFaces(plain: string): string {
   }
   close();
   return out;
+}
+
+/** A full stop, a comma or the like of another script: as ours, without a mark. A dot within a name is none. */
+function stopOf(cluster: string): string | undefined {
+  return /^(?!・)[\p{Po}\p{Ps}\p{Pe}]$/u.test(cluster) ? romanise(cluster) : undefined;
 }
 
 /** A character with its marks, or the same more plainly; nothing when no face draws it. */
