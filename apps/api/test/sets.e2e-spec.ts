@@ -186,6 +186,30 @@ describe('sets', () => {
       expect(body.fields[0].path).toBe('document.seating.0.sitter.castId');
     });
 
+    it('knows people by their id as it is written, since the document keeps it so', async () => {
+      const id = await createCastMember(test, place);
+      const { body } = await save(1, seated(facing(), [id.toUpperCase()])).expect(400);
+      expect(body.fields[0].path).toBe('document.seating.0.sitter.castId');
+      await save(1, seated(facing(), [id])).expect(200);
+    });
+
+    it('is not saved while its production is put away', async () => {
+      await owner().post(`${place.path}/archive`).expect(200);
+      const { body } = await save(1, facing()).expect(409);
+      expect(body.code).toBe('production-archived');
+      await owner().post(`${place.path}/restore`).expect(200);
+      await save(1, facing()).expect(200);
+    });
+
+    it('moves the set to the front of those that changed last', async () => {
+      await owner().post(`${place.path}/sets`).send({ name: 'Younger' }).expect(201);
+      const newest = async () =>
+        (await owner().get(`${place.path}/sets?sort=updatedAt&order=desc`).expect(200)).body.items[0];
+      expect((await newest()).name).toBe('Younger');
+      await save(1, facing()).expect(200);
+      expect(await newest()).toMatchObject({ name: 'Dining car', draftNumber: 2 });
+    });
+
     it.each(['carpenter', 'reviewer'] as const)('lets a %s read it and not save it', async (role) => {
       const person = await createMember(test, place.workshop.id, role);
       await as(test, person).get(`${place.setPath}/draft`).expect(200);

@@ -1,18 +1,13 @@
 import { type ExecutionContext, Injectable } from '@nestjs/common';
 import { Reflector } from '@nestjs/core';
 import { AuthGuard } from '@nestjs/passport';
-import { isUUID } from 'class-validator';
 import { ACCESS_RULE, type AccessRequest, type AccessRule, type Role } from '../common/access.decorator';
 import { Problem } from '../common/problem';
-import { WorkshopsService } from '../workshops/workshops.service';
 
 /** Stands before every route and lets nobody through whom the route's rule does not name. */
 @Injectable()
 export class AccessGuard extends AuthGuard('jwt') {
-  constructor(
-    private readonly reflector: Reflector,
-    private readonly workshops: WorkshopsService,
-  ) {
+  constructor(private readonly reflector: Reflector) {
     super();
   }
 
@@ -28,7 +23,7 @@ export class AccessGuard extends AuthGuard('jwt') {
     }
     await super.canActivate(context);
     if (rule[0] === 'signed-in') return true;
-    return this.isMemberWith(rule as readonly Role[], context.switchToHttp().getRequest<AccessRequest>());
+    return isMemberWith(rule as readonly Role[], context.switchToHttp().getRequest<AccessRequest>());
   }
 
   /** An open route may still want to know who asks, as when a signed-in person accepts an invitation. */
@@ -41,17 +36,15 @@ export class AccessGuard extends AuthGuard('jwt') {
       // An ended session is as good as none here.
     }
   }
+}
 
-  private async isMemberWith(roles: readonly Role[], request: AccessRequest): Promise<boolean> {
-    const workshopId = request.params.workshopId;
-    const userId = request.user?.id;
-    if (!userId || typeof workshopId !== 'string' || !isUUID(workshopId)) throw Problem.notFound('workshop');
-    const role = await this.workshops.findRole(workshopId, userId);
-    if (!role) throw Problem.notFound('workshop');
-    request.member = { workshopId, userId, role };
-    if (!roles.includes(role)) {
-      throw Problem.forbidden('role-not-allowed', `This is for: ${roles.join(', ')}. Your role is ${role}.`);
-    }
-    return true;
+function isMemberWith(roles: readonly Role[], { member }: AccessRequest): boolean {
+  if (!member) throw Problem.notFound('workshop');
+  if (!roles.includes(member.role)) {
+    throw Problem.forbidden(
+      'role-not-allowed',
+      `This is for: ${roles.join(', ')}. Your role is ${member.role}.`,
+    );
   }
+  return true;
 }

@@ -33,14 +33,6 @@ export class SessionsService {
     private readonly jwt: JwtService,
   ) {}
 
-  async isOpen(sessionId: string, userId: string): Promise<boolean> {
-    return this.dataSource
-      .createQueryBuilder(Session, 'session')
-      .where('session.id = :sessionId AND session.userId = :userId', { sessionId, userId })
-      .andWhere('session.endedAt IS NULL AND session.expiresAt > now()')
-      .getExists();
-  }
-
   async open(manager: EntityManager, userId: string): Promise<IssuedTokens> {
     const expiresAt = new Date(Date.now() + SESSION_DAYS * 86_400_000);
     const session = await manager.save(Session, manager.create(Session, { userId, expiresAt }));

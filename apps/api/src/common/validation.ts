@@ -1,11 +1,47 @@
-import { ValidationPipe, type ValidationError } from '@nestjs/common';
+import {
+  applyDecorators,
+  type ArgumentMetadata,
+  type Type,
+  type ValidationError,
+  ValidationPipe,
+} from '@nestjs/common';
+import { IsObject } from 'class-validator';
 import { Problem, type ProblemField } from './problem';
 
 const NEVER_REPEATED = /password|token|secret/i;
 
+const verbatim = new WeakMap<object, string[]>();
+
+/**
+ * An object that is handed on just as it was parsed, because a reader of its own follows. Copying and walking a whole
+ * document here, only to have it read again, would be a good part of the cost of a save.
+ */
+export function Verbatim(): PropertyDecorator {
+  return applyDecorators(IsObject(), (prototype: object, name: string | symbol) => {
+    verbatim.set(prototype, [...(verbatim.get(prototype) ?? []), String(name)]);
+  });
+}
+
+/** Lays the verbatim objects aside while the rest is read. */
+class BodyPipe extends ValidationPipe {
+  override async transform(value: unknown, metadata: ArgumentMetadata): Promise<unknown> {
+    const names = metadata.metatype && verbatim.get((metadata.metatype as Type<object>).prototype as object);
+    if (!names || !isObject(value)) return super.transform(value, metadata);
+    const aside = Object.fromEntries(
+      names.filter((name) => isObject(value[name])).map((name) => [name, value[name]]),
+    );
+    const stood = Object.fromEntries(Object.keys(aside).map((name) => [name, {}]));
+    return Object.assign((await super.transform({ ...value, ...stood }, metadata)) as object, aside);
+  }
+}
+
+function isObject(value: unknown): value is Record<string, unknown> {
+  return typeof value === 'object' && value !== null && !Array.isArray(value);
+}
+
 /** Reads every body, query and parameter object; unknown keys are refused, all faults are named at once. */
 export function createValidationPipe(): ValidationPipe {
-  return new ValidationPipe({
+  return new BodyPipe({
     whitelist: true,
     forbidNonWhitelisted: true,
     transform: true,

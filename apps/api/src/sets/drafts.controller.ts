@@ -36,10 +36,7 @@ export class DraftsController {
     @IdParam('setId') setId: string,
     @Body() dto: SaveDraftDto,
   ): Promise<SavedDraftDto> {
-    const { number, savedAt, savedBy } = DraftDto.of(
-      await this.drafts.save(member, productionId, setId, dto),
-    );
-    return { number, savedAt, savedBy };
+    return SavedDraftDto.ofSaved(await this.drafts.save(member, productionId, setId, dto));
   }
 
   @Get('fit-sheet')

@@ -1,7 +1,7 @@
 import type { SetDocument } from '@settlewright/geometry';
 import { Injectable, Logger } from '@nestjs/common';
 import { InjectRepository } from '@nestjs/typeorm';
-import { type EntityManager, LessThanOrEqual, type Repository } from 'typeorm';
+import type { EntityManager, Repository } from 'typeorm';
 import { type CastPerson, castPerson } from '../cast/known-person';
 import type { MemberInfo } from '../common/access.decorator';
 import { Problem } from '../common/problem';
@@ -11,11 +11,10 @@ import { DraftDto, type SaveDraftDto } from './dto/draft.dto';
 import { DesignedSet } from './entities/designed-set.entity';
 import { type Counts, SetDraft } from './entities/set-draft.entity';
 import { readSentDocument } from './sent-document';
+import { type DraftInForce, draftsInForce } from './drafts-in-force';
+import { type SavedDraft, saveDraft } from './save-draft';
 import { castIdsOf, SeatedPeople } from './seated-people.service';
 import { SetAccess } from './set-access';
-
-/** Drafts of a set that stay, so that a stale save can be compared with what it began from. */
-const KEPT_DRAFTS = 50;
 
 @Injectable()
 export class DraftsService {
@@ -38,35 +37,16 @@ export class DraftsService {
     productionId: string,
     setId: string,
     { baseNumber, document: sent }: SaveDraftDto,
-  ): Promise<SetDraft> {
+  ): Promise<SavedDraft> {
+    const document = readSentDocument(sent);
+    const place = { productionId, setId, baseNumber };
+    const saved = await saveDraft(this.drafts.manager.dataSource, member, place, document);
+    if (saved) return saved;
     await this.access.forChanging(member, productionId, setId);
-    const document = await this.readSent(productionId, sent);
-    return this.drafts.manager.transaction(async (manager) => {
-      // One statement compares, counts on and keeps other writers off until the transaction ends.
-      const { affected } = await manager
-        .createQueryBuilder()
-        .update(DesignedSet)
-        .set({ draftNumber: () => 'draft_number + 1' })
-        .where('id = :setId AND draft_number = :baseNumber', { setId, baseNumber })
-        .execute();
-      if (affected !== 1)
-        throw await this.conflict(manager, await this.access.locked(manager, setId), baseNumber);
-      const number = baseNumber + 1;
-      await this.keep(manager, member, { id: setId, productionId, draftNumber: number }, document);
-      await manager.delete(SetDraft, { setId, number: LessThanOrEqual(number - KEPT_DRAFTS) });
-      const saved = await manager.findOneOrFail(SetDraft, {
-        where: { setId, number },
-        relations: { savedBy: true },
-        select: {
-          setId: true,
-          number: true,
-          savedAt: true,
-          savedById: true,
-          savedBy: { id: true, name: true },
-        },
-      });
-      return { ...saved, document };
-    });
+    await this.refuseStrangers(productionId, document);
+    throw await this.drafts.manager.transaction(async (manager) =>
+      this.conflict(manager, await this.access.locked(manager, setId), baseNumber),
+    );
   }
 
   /** The draft that a set stands at. */
@@ -95,6 +75,11 @@ export class DraftsService {
   /** A document somebody sent: read, and everyone at its places belongs to the production. */
   async readSent(productionId: string, sent: unknown): Promise<SetDocument> {
     const document = readSentDocument(sent);
+    await this.refuseStrangers(productionId, document);
+    return document;
+  }
+
+  private async refuseStrangers(productionId: string, document: SetDocument): Promise<void> {
     const known = new Set((await this.people.of(productionId, [document])).map(({ id }) => id));
     const strangers = document.seating.flatMap(({ sitter }, index) =>
       sitter.kind === 'cast' && !known.has(sitter.castId)
@@ -108,16 +93,12 @@ export class DraftsService {
         : [],
     );
     if (strangers.length > 0) throw Problem.invalid(strangers);
-    return document;
   }
 
   /** The drafts in force of several sets; counts older than what they rest on are made again. */
-  async withFreshCounts(productionId: string, sets: DesignedSet[]): Promise<Map<string, SetDraft>> {
-    if (sets.length === 0) return new Map();
-    const found = await this.drafts.find({
-      where: sets.map(({ id, draftNumber }) => ({ setId: id, number: draftNumber })),
-      relations: { savedBy: true },
-    });
+  async withFreshCounts(productionId: string, setIds: string[]): Promise<Map<string, DraftInForce>> {
+    if (setIds.length === 0) return new Map();
+    const found = await draftsInForce(this.drafts.manager.dataSource, setIds);
     const people = await this.people.of(
       productionId,
       found.map(({ document }) => document),

@@ -1,7 +1,7 @@
 import type { SetDocument } from '@settlewright/geometry';
 import { Injectable } from '@nestjs/common';
 import { InjectRepository } from '@nestjs/typeorm';
-import { type EntityManager, In, type Repository } from 'typeorm';
+import { type EntityManager, In, type Repository, type SelectQueryBuilder } from 'typeorm';
 import { AuditService } from '../audit/audit.service';
 import { castPerson } from '../cast/known-person';
 import type { MemberInfo } from '../common/access.decorator';
@@ -18,6 +18,19 @@ import { SetRevision } from './entities/set-revision.entity';
 import { revisionLetter } from './letters';
 import { SeatedPeople } from './seated-people.service';
 import { SetAccess } from './set-access';
+
+/** What a list says of a revision: neither its document nor its sheet, which are large. */
+const LISTED = [
+  'id',
+  'setId',
+  'ordinal',
+  'letter',
+  'draftNumber',
+  'issuedAt',
+  'issuedById',
+  'note',
+  'counts',
+] as const satisfies (keyof SetRevision)[];
 
 const LETTERS = /^[A-Z]{1,6}$/i;
 
@@ -81,10 +94,7 @@ export class RevisionsService {
     query: PageQuery,
   ): Promise<Page<RevisionDto>> {
     await this.access.forReading(member, productionId, setId);
-    const select = this.revisions
-      .createQueryBuilder('revision')
-      .leftJoinAndSelect('revision.issuedBy', 'issuer')
-      .where('revision.setId = :setId', { setId });
+    const select = this.listed().where('revision.setId = :setId', { setId });
     const page = await readPage(select, query, {
       sortable: { letter: 'revision.ordinal', issuedAt: 'revision.issuedAt' },
       defaultSort: 'letter',
@@ -140,9 +150,7 @@ export class RevisionsService {
   /** The newest revision of each set that has one, by set. */
   async latestOf(setIds: string[]): Promise<Map<string, RevisionDto>> {
     if (setIds.length === 0) return new Map();
-    const newest = await this.revisions
-      .createQueryBuilder('revision')
-      .leftJoinAndSelect('revision.issuedBy', 'issuer')
+    const newest = await this.listed()
       .distinctOn(['revision.setId'])
       .where('revision.setId IN (:...setIds)', { setIds })
       .orderBy('revision.setId')
@@ -179,7 +187,16 @@ export class RevisionsService {
     await manager.query("SELECT set_config('settlewright.erasing', 'off', true)");
   }
 
+  private listed(): SelectQueryBuilder<SetRevision> {
+    return this.revisions
+      .createQueryBuilder('revision')
+      .select(LISTED.map((column) => `revision.${column}`))
+      .leftJoin('revision.issuedBy', 'issuer')
+      .addSelect(['issuer.id', 'issuer.name']);
+  }
+
   private async describe(revisions: SetRevision[]): Promise<RevisionDto[]> {
+    if (revisions.length === 0) return [];
     const approvals = await this.approvalsOf(revisions.map(({ id }) => id));
     return revisions.map((revision) =>
       RevisionDto.of(

@@ -10,7 +10,6 @@ import { readPage } from '../common/read-page';
 import { ProductionsService } from '../productions/productions.service';
 import { DraftsService } from './drafts.service';
 import type { CreateSetDto, RenameSetDto, SetDto, SetQuery } from './dto/set.dto';
-import { PersonDto } from './dto/person.dto';
 import { DesignedSet } from './entities/designed-set.entity';
 import { SetAccess } from './set-access';
 import { RevisionsService } from './revisions.service';
@@ -128,19 +127,20 @@ export class SetsService {
   }
 
   private async describe(productionId: string, sets: DesignedSet[]): Promise<SetDto[]> {
-    const drafts = await this.drafts.withFreshCounts(productionId, sets);
-    const revisions = await this.revisions.latestOf(sets.map(({ id }) => id));
+    const ids = sets.map(({ id }) => id);
+    const drafts = await this.drafts.withFreshCounts(productionId, ids);
+    const revisions = await this.revisions.latestOf(ids);
     return sets.map((set): SetDto => {
       const draft = drafts.get(set.id);
-      if (!draft) throw new Error(`set ${set.id} has no draft ${set.draftNumber}`);
+      if (!draft) throw new Error(`set ${set.id} has no draft in force`);
       const lastRevision = revisions.get(set.id);
       return {
         id: set.id,
         name: set.name,
         status: set.archivedAt ? 'archived' : 'active',
-        draftNumber: set.draftNumber,
+        draftNumber: draft.number,
         savedAt: draft.savedAt.toISOString(),
-        savedBy: PersonDto.of(draft.savedById, draft.savedBy),
+        savedBy: { id: draft.savedById, name: draft.savedByName },
         ...(lastRevision ? { lastRevision } : {}),
         pieceCount: draft.document.pieces.length,
         seatedCount: draft.document.seating.length,

@@ -1,8 +1,10 @@
 import type { SetDocument } from '@settlewright/geometry';
 import { ApiProperty, OmitType } from '@nestjs/swagger';
-import { IsInt, IsObject, Min } from 'class-validator';
+import { IsInt, Min } from 'class-validator';
 import { ProblemBody } from '../../common/problem';
+import { Verbatim } from '../../common/validation';
 import type { SetDraft } from '../entities/set-draft.entity';
+import type { SavedDraft } from '../save-draft';
 import { documentSchema } from './document.schema';
 import { PersonDto } from './person.dto';
 
@@ -13,7 +15,7 @@ export class SaveDraftDto {
   baseNumber: number;
 
   @ApiProperty(documentSchema)
-  @IsObject()
+  @Verbatim()
   document: Record<string, unknown>;
 }
 
@@ -37,7 +39,11 @@ export class DraftDto {
   }
 }
 
-export class SavedDraftDto extends OmitType(DraftDto, ['document']) {}
+export class SavedDraftDto extends OmitType(DraftDto, ['document']) {
+  static ofSaved({ number, savedAt, savedById, savedByName }: SavedDraft): SavedDraftDto {
+    return { number, savedAt: savedAt.toISOString(), savedBy: { id: savedById, name: savedByName } };
+  }
+}
 
 export class DraftBaseDto {
   @ApiProperty()

@@ -1,8 +1,9 @@
 import type { SetDocument } from '@settlewright/geometry';
 import { ApiProperty, ApiPropertyOptional } from '@nestjs/swagger';
-import { IsIn, IsObject, IsOptional } from 'class-validator';
+import { IsIn, IsOptional } from 'class-validator';
 import { PageQuery } from '../../common/page.dto';
 import { TextField } from '../../common/text-field';
+import { Verbatim } from '../../common/validation';
 import { documentSchema } from './document.schema';
 import { CountsDto } from './fit-sheet.dto';
 import { PersonDto } from './person.dto';
@@ -35,7 +36,7 @@ export class CreateSetDto {
     description: 'a set document to begin with, instead of an arrangement',
   })
   @IsOptional()
-  @IsObject()
+  @Verbatim()
   document?: Record<string, unknown>;
 }
 
