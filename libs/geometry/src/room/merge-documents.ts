@@ -91,8 +91,8 @@ function withMine(merged: SetDocument, difference: DocumentDifference): SetDocum
       return { ...merged, asked: withPath(merged.asked, key, mine) };
     case 'known-difference': {
       const others = merged.knownDifferences.filter(({ id }) => id !== key);
-      const text = mine as string | undefined;
-      return { ...merged, knownDifferences: text === undefined ? others : [...others, { id: key, text }] };
+      const written = mine as SetDocument['knownDifferences'][number] | undefined;
+      return { ...merged, knownDifferences: written === undefined ? others : [...others, written] };
     }
   }
 }

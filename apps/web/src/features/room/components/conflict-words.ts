@@ -39,6 +39,7 @@ export function sayValue(difference: DocumentDifference, side: Side | 'base', wo
   const value = difference[side];
   if (value === undefined || value === null) return kind === 'seating' ? 'nobody' : 'none';
   if (kind === 'piece') return 'kept';
+  if (kind === 'known-difference') return (value as SetDocument['knownDifferences'][number]).text;
   if (kind === 'seating' && isSitter(value)) return sitterName(value, words.cast);
   if (key === 'at' && typeof value === 'object') return 'moved';
   const piece = words.documents[side].pieces.find((candidate) => candidate.id === pieceId);

@@ -4,6 +4,8 @@ import { Button } from '@/components/button.tsx';
 import { Dialog } from '@/components/dialog.tsx';
 import { RuleHeading } from '@/components/rule-heading.tsx';
 import { TextArea } from '@/components/text-field.tsx';
+import { dayWords } from '@/lib/dates.ts';
+import { useSession } from '@/lib/session.ts';
 import { useSurroundings } from '../room-context.tsx';
 
 interface Props {
@@ -48,9 +50,9 @@ export function KnownDifferences({ document, onReplace }: Props) {
       >
         <ol className="grid gap-4">
           {list.map((difference, n) => (
-            <li key={difference.id} className="flex items-end gap-3">
+            <li key={difference.id} className="flex flex-wrap items-end gap-x-3">
               <TextArea
-                className="flex-1"
+                className="min-w-0 flex-1"
                 label={`Difference ${n + 1}`}
                 defaultValue={difference.text}
                 maxLength={1000}
@@ -83,6 +85,7 @@ export function KnownDifferences({ document, onReplace }: Props) {
                   Remove<span className="sr-only"> difference {n + 1}</span>
                 </Button>
               )}
+              <Kept difference={difference} />
             </li>
           ))}
         </ol>
@@ -92,20 +95,41 @@ export function KnownDifferences({ document, onReplace }: Props) {
   );
 }
 
+/** Why a difference is kept, who said so, and when. */
+function Kept({ difference: { reason, by, on } }: { difference: SetDocument['knownDifferences'][number] }) {
+  const who = [by, on && dayWords(on)].filter(Boolean).join(', ');
+  if (!reason && !who) return null;
+  return (
+    <p className="mt-1 w-full text-sm text-ink-2">
+      {reason && <span className="block whitespace-pre-line">Because: {reason}</span>}
+      {who && <span className="text-ink-3">{who}</span>}
+    </p>
+  );
+}
+
 function AddDifference({ document, onReplace }: Props) {
   const [text, setText] = useState('');
+  const [reason, setReason] = useState('');
+  const by = useSession((state) => state.user?.name);
   return (
     <form
       className="mt-5 grid gap-3"
       onSubmit={(event) => {
         event.preventDefault();
         if (text.trim() === '') return;
-        const added = { id: crypto.randomUUID(), text: text.trim() };
+        const added = {
+          id: crypto.randomUUID(),
+          text: text.trim(),
+          ...(reason.trim() ? { reason: reason.trim() } : {}),
+          ...(by ? { by } : {}),
+          on: new Date().toISOString().slice(0, 10),
+        };
         onReplace(
           { ...document, knownDifferences: [...document.knownDifferences, added] },
           'Known difference added',
         );
         setText('');
+        setReason('');
       }}
     >
       <TextArea
@@ -115,6 +139,14 @@ function AddDifference({ document, onReplace }: Props) {
         maxLength={1000}
         rows={2}
         onChange={(event) => setText(event.target.value)}
+      />
+      <TextArea
+        label="Why it is kept"
+        description="Optional. For example: the photograph shows it, and the camera sees it."
+        value={reason}
+        maxLength={1000}
+        rows={2}
+        onChange={(event) => setReason(event.target.value)}
       />
       <div>
         <Button type="submit" size="small">
