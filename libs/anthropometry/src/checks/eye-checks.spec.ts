@@ -125,7 +125,7 @@ describe('where a sitter looks', () => {
   });
 
   it('HEAD-05: a lens too high or too low by more than 150 is a choice that is told; none is not asked', () => {
-    const at = (lensHeightMm: number | null) =>
+    const at = (lensHeightMm: number | undefined) =>
       found(
         check(set({ places: [place()] }), [sitter(who)], { lensHeightMm }).rows[0]?.cells ?? [],
         'HEAD-05',
@@ -138,7 +138,10 @@ describe('where a sitter looks', () => {
       'tight',
       'wontFit',
     ]);
-    expect(at(null).outcome).toEqual({ kind: 'notAsked', reason: 'the height of the lens is not given' });
+    expect(at(undefined).outcome).toEqual({
+      kind: 'notAsked',
+      reason: 'the height of the lens is not given',
+    });
   });
 
   it('HEAD-03: a person needs stature, shoe and 25; one line, so never tight', () => {

@@ -94,7 +94,7 @@ export const lensAtEye: PersonCheck = {
   id: 'HEAD-05',
   ask(asked) {
     const { lensHeightMm, rule } = asked;
-    if (typeof lensHeightMm !== 'number') {
+    if (lensHeightMm === undefined) {
       return { kind: 'notAsked', reason: 'the height of the lens is not given' };
     }
     const { entries, ledger } = eyeAtEase(asked);

@@ -19,8 +19,8 @@ export interface Asked {
   body: Body;
   sink: Sink;
   model: BodyModel;
-  /** Height of the lens over the floor, millimetres; absent or null where no camera is asked about. */
-  lensHeightMm?: number | null | undefined;
+  /** Height of the lens over the floor, millimetres; absent where no camera is asked about. */
+  lensHeightMm?: number | undefined;
 }
 
 /** How far the cushion goes down under a sitter, as far as the weight is known. */

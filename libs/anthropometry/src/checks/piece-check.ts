@@ -14,14 +14,14 @@ export interface CheckSettings {
   backPosture: 'dining' | 'lounge';
   /** Who passes behind loose seats (EGRESS-02). */
   trafficBehind: 'none' | 'edge-past' | 'walk-past' | 'wheelchair';
-  /** Height of the lens over the floor, millimetres; absent or null where no camera is asked about (HEAD-05). */
-  lensHeightMm?: number | null;
-  /** How many apple boxes of each size are at hand; absent or null where eye lines are not asked about (HEAD-04). */
-  appleBoxes?: AppleBoxes | null;
+  /** Height of the lens over the floor, millimetres; absent where no camera is asked about (HEAD-05). */
+  lensHeightMm?: number | undefined;
+  /** How many apple boxes of each size are at hand; absent where eye lines are not asked about (HEAD-04). */
+  appleBoxes?: AppleBoxes | undefined;
   /** The door on the way in: clear width and depth of the opening, millimetres (ACC-09). */
-  door?: { clearWidthMm: number; depthMm: number } | null;
+  door?: { clearWidthMm: number; depthMm: number } | undefined;
   /** Spaces kept among fixed seats for people who bring a wheelchair (ACC-10). */
-  wheelchairSpaces?: number | null;
+  wheelchairSpaces?: number | undefined;
   /** Probability from which a verdict is given; the rule book's when absent. */
   confidence?: number;
 }

@@ -101,7 +101,7 @@ export const wheelchairSpaces: PieceCheck = {
   id: 'ACC-10',
   ask({ settings, situation, rule, tolerance }) {
     const spaces = settings.wheelchairSpaces;
-    if (typeof spaces !== 'number') return notAsked('the wheelchair spaces kept are not given');
+    if (spaces === undefined) return notAsked('the wheelchair spaces kept are not given');
     const seats = situation.benches.reduce((sum, { placeIds }) => sum + placeIds.length, 0);
     const least = ruleNumber(rule, 'leastSeats');
     if (seats < least) {

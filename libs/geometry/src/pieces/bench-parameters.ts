@@ -114,6 +114,28 @@ export const BENCH_PARAMETERS: readonly BenchParameter[] = [
     applies: hasBack,
   },
   {
+    key: 'lumbar.apexMm',
+    label: 'Back curve',
+    kind: 'length',
+    group: 'more',
+    describes: 'pressed seat to where the back stands out most; 0 for a flat back',
+    applies: hasBack,
+    read: (bench) => bench.lumbar?.apexMm ?? 0,
+    write: (bench, value) => withLumbar(bench, { apexMm: Number(value) }),
+    limits: () => ({ min: 0, max: 400 }),
+  },
+  {
+    key: 'lumbar.recessMm',
+    label: 'Pelvis room',
+    kind: 'length',
+    group: 'more',
+    describes: 'how far the back gives way between 100 and 200 mm above the pressed seat; 0 for none',
+    applies: hasBack,
+    read: (bench) => bench.lumbar?.recessMm ?? 0,
+    write: (bench, value) => withLumbar(bench, { recessMm: Number(value) }),
+    limits: () => ({ min: 0, max: 150 }),
+  },
+  {
     key: 'places.count',
     label: 'Places',
     kind: 'count',
@@ -224,6 +246,13 @@ export const BENCH_PARAMETERS: readonly BenchParameter[] = [
     describes: 'a longer run is split into equal cushions',
   },
 ];
+
+const FLAT = { apexMm: 0, recessMm: 0 };
+
+const withLumbar = (bench: Bench, change: Partial<typeof FLAT>): Bench => ({
+  ...bench,
+  lumbar: { ...FLAT, ...bench.lumbar, ...change },
+});
 
 function endsMm(bench: Bench): number {
   return bench.ends.left.thicknessMm + bench.ends.right.thicknessMm;

@@ -32,11 +32,18 @@ const LABELS: Record<string, string> = {
   'seatCushion.foam': 'Seat foam',
   'backCushion.foam': 'Back foam',
   'upholstery.buttons': 'Buttons',
+  lumbar: 'Back curve',
 };
 
 const ASKED_LABELS: Record<string, string> = {
   backPosture: 'Posture',
   trafficBehind: 'Who passes behind seats',
+  lensHeightMm: 'Height of the lens',
+  appleBoxes: 'Apple boxes at hand',
+  route: 'Route kept clear',
+  turningAt: 'Spot for turning round',
+  door: 'Door on the way in',
+  wheelchairSpaces: 'Wheelchair spaces kept',
 };
 
 /**
@@ -166,7 +173,8 @@ function askedDifferences(
   mine: SetDocument,
   theirs: SetDocument,
 ): DocumentDifference[] {
-  return (Object.keys(mine.asked) as (keyof SetDocument['asked'])[]).flatMap((key) =>
+  const keys = new Set([theirs, mine].flatMap(({ asked }) => Object.keys(asked)));
+  return ([...keys] as (keyof SetDocument['asked'])[]).flatMap((key) =>
     compared(
       { id: `asked:${key}`, kind: 'asked', key, label: ASKED_LABELS[key] ?? key },
       { base: base?.asked[key], mine: mine.asked[key], theirs: theirs.asked[key] },
@@ -180,13 +188,13 @@ function noteDifferences(
   mine: SetDocument,
   theirs: SetDocument,
 ): DocumentDifference[] {
-  const written = (document: SetDocument | null, id: string) =>
-    document?.knownDifferences.find((note) => note.id === id);
+  const text = (document: SetDocument | null, id: string) =>
+    document?.knownDifferences.find((note) => note.id === id)?.text;
   const ids = new Set([...theirs.knownDifferences, ...mine.knownDifferences].map(({ id }) => id));
   return [...ids].flatMap((id) =>
     compared(
       { id: `note:${id}`, kind: 'known-difference', key: id, label: 'Known difference' },
-      { base: written(base, id), mine: written(mine, id), theirs: written(theirs, id) },
+      { base: text(base, id), mine: text(mine, id), theirs: text(theirs, id) },
       base !== null,
     ),
   );

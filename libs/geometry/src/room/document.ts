@@ -69,6 +69,8 @@ const bench = z.strictObject({
   backThicknessMm: length(10, 200),
   seatCushion: cushion,
   backCushion: cushion,
+  /** Curve of the back: its apex above the pressed seat, and how far the back gives way below it. Absent: a flat back. */
+  lumbar: z.strictObject({ apexMm: length(0, 400), recessMm: length(0, 150) }).optional(),
   base: z.enum(['box', 'open']),
   kick: z.strictObject({ depthMm: length(0, 400), heightMm: length(0, 400) }),
   /** Deck and lip stand out before the riser by this much. */
@@ -168,6 +170,9 @@ const sitterRef = z.discriminatedUnion('kind', [
   }),
 ]);
 
+const spot = z.strictObject({ xMm: length(-50000, 50000), zMm: length(-50000, 50000) });
+const boxes = z.number().int().min(0).max(20);
+
 /** The set document: what the designer draws, and nothing that can be derived from it. */
 export const setDocumentSchema = z.strictObject({
   schemaVersion: z.literal(SCHEMA_VERSION),
@@ -183,19 +188,20 @@ export const setDocumentSchema = z.strictObject({
     backPosture: z.enum(['dining', 'lounge']),
     /** Who passes behind loose seats (EGRESS-02). */
     trafficBehind: z.enum(['none', 'edge-past', 'walk-past', 'wheelchair']),
+    /** Height of the lens (HEAD-05). What is absent from here on is not asked. */
+    lensHeightMm: length(0, 4000).optional(),
+    /** Apple boxes at hand (HEAD-04). */
+    appleBoxes: z.strictObject({ full: boxes, half: boxes, quarter: boxes, pancake: boxes }).optional(),
+    /** Corners of the route that is kept clear, from its start to its end (EGRESS-03). */
+    route: z.array(spot).min(2).max(40).optional(),
+    /** Middle of the floor that is kept clear for turning round (ACC-08). */
+    turningAt: spot.optional(),
+    /** Clear width of the door on the way in, and depth of its opening (ACC-09). */
+    door: z.strictObject({ clearWidthMm: length(0, 5000), depthMm: length(0, 2000) }).optional(),
+    /** Spaces kept among fixed seats (ACC-10). */
+    wheelchairSpaces: z.number().int().min(0).max(500).optional(),
   }),
-  knownDifferences: z
-    .array(
-      z.strictObject({
-        id: z.string().min(1).max(40),
-        text: text(1000),
-        /** Why it is kept, who said so, and on which day (YYYY-MM-DD); absent where nobody wrote it down. */
-        reason: text(1000).optional(),
-        by: text(120).optional(),
-        on: z.iso.date().optional(),
-      }),
-    )
-    .max(200),
+  knownDifferences: z.array(z.strictObject({ id: z.string().min(1).max(40), text: text(1000) })).max(200),
 });
 
 export type SetDocument = z.infer<typeof setDocumentSchema>;

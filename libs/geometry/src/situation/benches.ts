@@ -4,6 +4,8 @@ import { benchLayout } from '../pieces/bench-layout.ts';
 import { insideCorners } from '../pieces/corners.ts';
 import type { PieceOf } from '../room/document.ts';
 import { clipped, clippedLine, extent, inFrame, type PlanOutline } from './plan.ts';
+import { endSpace } from './clear-floor.ts';
+import { peopleToSlidePast } from './ways-out.ts';
 import { planOfPiece, rectangleOf, solidsNear, type Survey, type SurveyedPlace } from './survey.ts';
 
 type Bench = PieceOf<'bench'>;
@@ -57,6 +59,10 @@ export function benchSituations(found: Survey): BenchSituation[] {
       unpressedSeatTopMm: seatTop,
       accessible: bench.accessible,
       back: layout.hasBack ? own : wallAlone,
+      lumbar: layout.hasBack ? (bench.lumbar ?? { apexMm: 0, recessMm: 0 }) : undefined,
+      slidePast: peopleToSlidePast(found, bench),
+      // Measured where it is asked: a wheelchair comes alongside a bench that is kept accessible.
+      endSpace: bench.accessible ? endSpace(found, bench) : undefined,
     };
   });
 }

@@ -14,6 +14,8 @@ const WALL_REACH_MM = 1000;
 /** Height band above the seat in which elbows and shoulders meet a wall. */
 const ELBOW_BAND_MM = [150, 600] as const;
 const HEAD_HALF_MM = 150;
+/** Before the seat front, the floor on which one stands up. */
+const STAND_UP_MM = 300;
 
 const WALL_ROLES = ['wall-board', 'wall-panel', 'end-wall', 'frame', 'glass'];
 
@@ -93,13 +95,30 @@ export function wallsBeside(found: Survey, place: SurveyedPlace): { left?: numbe
  * @returns its underside above the floor; undefined under an open ceiling
  */
 export function overheadOf(found: Survey, place: SurveyedPlace): OverheadSituation | undefined {
-  let lowest: OverheadSituation | undefined;
   const hip = -place.hipBehindFrontMm;
+  return lowestOver(found, place, [hip - HEAD_HALF_MM, hip + HEAD_HALF_MM]);
+}
+
+/**
+ * The lowest beam over the floor just before the seat, where one stands up.
+ *
+ * @param found - the survey
+ * @param place - the place
+ * @returns its underside above the floor; undefined under an open ceiling
+ * @source 300 mm ahead of the seat, as in rule HEAD-03
+ */
+export function overheadAheadOf(found: Survey, place: SurveyedPlace): OverheadSituation | undefined {
+  return lowestOver(found, place, [0, STAND_UP_MM]);
+}
+
+function lowestOver(
+  found: Survey,
+  place: SurveyedPlace,
+  ahead: readonly [number, number],
+): OverheadSituation | undefined {
+  let lowest: OverheadSituation | undefined;
   for (const solid of solidsNear(found, place.plan, 1500, (piece) => piece.kind === 'overhead')) {
-    const above = clipped(solid.outline, {
-      left: [-HEAD_HALF_MM, HEAD_HALF_MM],
-      ahead: [hip - HEAD_HALF_MM, hip + HEAD_HALF_MM],
-    });
+    const above = clipped(solid.outline, { left: [-HEAD_HALF_MM, HEAD_HALF_MM], ahead });
     if (above.length === 0 || solid.bottomMm >= (lowest?.undersideMm ?? Infinity)) continue;
     const mark = found.pieces.find(({ piece }) => piece.id === solid.pieceId)?.piece.mark ?? '';
     lowest = { pieceId: solid.pieceId, mark, undersideMm: solid.bottomMm };

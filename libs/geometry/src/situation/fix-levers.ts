@@ -75,6 +75,8 @@ const MOVES: readonly (readonly [string, readonly Move[]])[] = [
       ['loose-seat', 'backLeanDeg'],
     ],
   ],
+  ['BACK-02', [['bench', 'lumbar.apexMm']]],
+  ['BACK-04', [['bench', 'lumbar.recessMm']]],
   [
     'BACK',
     [
@@ -108,6 +110,10 @@ const MOVES: readonly (readonly [string, readonly Move[]])[] = [
   ],
   ['SIDE', [BENCH_LONG, ...PLACES]],
   ['EGRESS-01', [['table', 'lengthMm']]],
+  ['HEAD-03', [['overhead', 'undersideMm']]],
+  // Where a lens stands and what a riser lifts is chosen for a shot, not built.
+  ['HEAD-04', []],
+  ['HEAD-05', []],
   ['HEAD', [['overhead', 'undersideMm'], SEAT_UP]],
   ['ACC-01', [SEAT_UP]],
   ['ACC-02', [['bench', 'seatDepthMm'], BENCH_LONG]],
@@ -142,7 +148,13 @@ function piecesOf(document: SetDocument, cell: FitCell): Piece[] {
   const ids = new Set(cell.pieceIds);
   if (cell.placeId !== undefined) {
     const place = measureSet(document).places.find(({ placeId }) => placeId === cell.placeId);
-    for (const near of [place, place?.table, place?.overhead, ...(place?.sills ?? [])]) {
+    for (const near of [
+      place,
+      place?.table,
+      place?.overhead,
+      place?.overheadAhead,
+      ...(place?.sills ?? []),
+    ]) {
       if (near !== undefined) ids.add(near.pieceId);
     }
   }

@@ -4,8 +4,11 @@ import { pressedSeatHeightMm } from '../pieces/seat-sink.ts';
 import type { SetDocument } from '../room/document.ts';
 import { radians } from '../units/angle.ts';
 import { benchSituations, cornerSituations, facingSituations } from './benches.ts';
-import { overheadOf, sillsBeside, wallsBeside } from './beside.ts';
+import { clearCircle, clearTeeArm } from './clear-floor.ts';
+import { overheadAheadOf, overheadOf, sillsBeside, wallsBeside } from './beside.ts';
 import { lapTable } from './lap-table.ts';
+import { routeStretches } from './route.ts';
+import { rowSituations } from './rows.ts';
 import { survey, type Survey, type SurveyedPlace } from './survey.ts';
 import { tableSituations } from './tables.ts';
 import { waySituations } from './ways.ts';
@@ -27,6 +30,7 @@ export function measureSet(document: SetDocument, settings: { sillReachMm?: numb
   const found = survey(document);
   const reach = settings.sillReachMm ?? SILL_REACH_MM;
   const places = found.places.map((place) => placeSituation(found, place, reach));
+  const { route, turningAt } = document.asked;
   return {
     places,
     benches: benchSituations(found),
@@ -34,6 +38,11 @@ export function measureSet(document: SetDocument, settings: { sillReachMm?: numb
     facing: facingSituations(found),
     corners: cornerSituations(found),
     ways: waySituations(found, places),
+    rows: rowSituations(found),
+    ...(route ? { route: routeStretches(found, route) } : {}),
+    ...(turningAt
+      ? { turning: { circleMm: clearCircle(found, turningAt), teeArmMm: clearTeeArm(found, turningAt) } }
+      : {}),
   };
 }
 
@@ -60,6 +69,7 @@ function placeSituation(found: Survey, place: SurveyedPlace, sillReachMm: number
     sills: sillsBeside(found, place, sillReachMm),
     table: lapTable(found, place),
     overhead: overheadOf(found, place),
+    overheadAhead: overheadAheadOf(found, place),
   };
 }
 

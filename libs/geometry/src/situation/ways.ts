@@ -12,11 +12,14 @@ const SERVES_MM = [-300, 400] as const;
 /** Tables nearer than this are pushed together and leave no way. */
 const TOGETHER_MM = 25;
 const WIDEST_WAY_MM = 2500;
+/** Sitters this near to looking straight apart sit back to back: 15°. */
+const OPPOSED_COSINE = Math.cos(Math.PI / 12);
 /** Walking room reaches up to here. */
 const HEAD_ROOM_MM = 2000;
 
 /**
- * Ways people go through: between the tables of a bench, and behind loose seats.
+ * Ways people go through: between the tables of a bench, behind loose seats, and between tables whose diners sit back
+ * to back on loose seats.
  *
  * @param found - the survey
  * @param places - the measured places
@@ -24,7 +27,7 @@ const HEAD_ROOM_MM = 2000;
  */
 export function waySituations(found: Survey, places: PlaceSituation[]): WaySituation[] {
   const behind = found.places.flatMap((place, i) => behindSeat(found, place, places[i]) ?? []);
-  return [...betweenTables(found), ...behind];
+  return [...betweenTables(found), ...behind, ...chairsBothSides(found, places)];
 }
 
 function betweenTables(found: Survey): WaySituation[] {
@@ -100,4 +103,41 @@ function behindSeat(
     marks: [place.piece.mark, table.mark],
     widthMm: -table.overlapMm - nearest,
   };
+}
+
+/** Table edge to table edge, once for each pair of tables, where it is least. */
+function chairsBothSides(found: Survey, places: PlaceSituation[]): WaySituation[] {
+  const seats = found.places.flatMap((place, i) => {
+    const table = tableOf(found, places[i]?.table?.pieceId);
+    const overlapMm = places[i]?.table?.overlapMm ?? 0;
+    return place.piece.kind === 'loose-seat' && table ? [{ place, table, overlapMm }] : [];
+  });
+  const ways = new Map<string, WaySituation>();
+  for (const { place, table, overlapMm } of seats) {
+    const half = place.frame.widthMm / 2;
+    for (const other of seats) {
+      if (other.table.id === table.id || !isBackToBack(place, other.place)) continue;
+      const [x, z] = [other.table.lengthMm / 2, other.table.widthMm / 2];
+      const top = inFrame(rectangleOf(other.table, [-x, x], [-z, z]), place.plan);
+      const behind = clipped(top, { left: [-half, half], ahead: [-WIDEST_WAY_MM, -place.effectiveDepthMm] });
+      if (behind.length === 0) continue;
+      const pair = [table, other.table].sort((a, b) => (a.id < b.id ? -1 : 1));
+      const key = pair.map(({ id }) => id).join(' ');
+      const widthMm = -overlapMm - extent(behind, 1)[1];
+      if ((ways.get(key)?.widthMm ?? Infinity) <= widthMm) continue;
+      const pieceIds = pair.map(({ id }) => id);
+      ways.set(key, { kind: 'chairs-both-sides', pieceIds, marks: pair.map(({ mark }) => mark), widthMm });
+    }
+  }
+  return [...ways.values()];
+}
+
+const tableOf = (found: Survey, id: string | undefined): Table | undefined =>
+  found.document.pieces.find((piece): piece is Table => piece.kind === 'table' && piece.id === id);
+
+/** Whether one sitter's back is turned to another's, with the other somewhere behind. */
+function isBackToBack(one: SurveyedPlace, other: SurveyedPlace): boolean {
+  if (Math.cos(one.plan.facingRad - other.plan.facingRad) > -OPPOSED_COSINE) return false;
+  const [front] = inFrame([[other.plan.xMm, other.plan.zMm]], one.plan);
+  return front !== undefined && front[1] < 0;
 }

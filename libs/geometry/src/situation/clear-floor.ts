@@ -1,0 +1,165 @@
+import type { PieceOf } from '../room/document.ts';
+import { benchLayout } from '../pieces/bench-layout.ts';
+import { clipped, extent, type PlanOutline, type PlanSolid } from './plan.ts';
+import { planOfPiece, solidsNear, type Survey } from './survey.ts';
+
+/** What hangs higher than this is in nobody's way on the floor, millimetres. */
+const OVER_HEADS_MM = 2032;
+const INCH_MM = 25.4;
+/** Clear floor is measured up to here; more asks nobody. */
+const FAR_MM = 2000;
+/** Clear floor of ADA 305.3, at the place where it is looked for: 30 by 48 in. */
+const FLOOR_MM = [30 * INCH_MM, 48 * INCH_MM] as const;
+/** ADA 304.3.2: a T lies within a square of 60 in. */
+const TEE_SQUARE_MM = 60 * INCH_MM;
+const NUDGE_MM = 0.01;
+
+/** A spot on the floor. */
+export interface Spot {
+  xMm: number;
+  zMm: number;
+}
+
+/** Whether a solid stands where people go. */
+export const isInTheWay = ({ bottomMm, topMm }: PlanSolid): boolean => bottomMm < OVER_HEADS_MM && topMm > 0;
+
+/**
+ * The largest circle around a spot that nothing stands in. Knee and toe space under tables is not counted.
+ *
+ * @param found - the survey
+ * @param spot - middle of the circle
+ * @returns its diameter, millimetres; 0 when something stands on the spot
+ */
+export function clearCircle(found: Survey, spot: Spot): number {
+  const plan = { ...spot, facingRad: 0 };
+  const distances = solidsNear(found, plan, FAR_MM, () => true, isInTheWay).map(({ outline }) =>
+    distanceToOrigin(outline),
+  );
+  return 2 * Math.min(FAR_MM, ...distances);
+}
+
+/** From the origin of a frame to a convex outline; 0 inside it. */
+function distanceToOrigin(outline: PlanOutline): number {
+  let nearest = Infinity;
+  let [left, right] = [false, false];
+  outline.forEach(([x, z], i) => {
+    const [nx, nz] = outline[(i + 1) % outline.length] ?? [x, z];
+    const [dx, dz] = [nx - x, nz - z];
+    const cross = dx * z - dz * x;
+    if (cross > 0) left = true;
+    if (cross < 0) right = true;
+    const length2 = dx * dx + dz * dz;
+    const t = length2 === 0 ? 0 : Math.min(1, Math.max(0, -(x * dx + z * dz) / length2));
+    nearest = Math.min(nearest, Math.hypot(x + t * dx, z + t * dz));
+  });
+  return left && right ? nearest : 0;
+}
+
+/**
+ * The widest T around a spot, arms and base of one width, in any of four directions along the room's axes.
+ *
+ * @param found - the survey
+ * @param spot - middle of the square that the T lies in
+ * @returns width of its arms, millimetres; 0 where the bar of the T is not clear
+ * @source square of ADA 304.3.2
+ */
+export function clearTeeArm(found: Survey, spot: Spot): number {
+  const half = TEE_SQUARE_MM / 2;
+  return Math.max(
+    ...[0, 1, 2, 3].map((quarter) => {
+      const plan = { ...spot, facingRad: (quarter * Math.PI) / 2 };
+      const near = solidsNear(found, plan, TEE_SQUARE_MM, () => true, isInTheWay);
+      // The bar grows from one side of the square, the base from its middle line: the lesser of the two counts.
+      const bar = depthOf(near, [-half, half], -half);
+      const base = stemWidth(near, -half + bar, half);
+      return Math.min(bar, base);
+    }),
+  );
+}
+
+/** How far a strip is clear from a line on. */
+function depthOf(solids: readonly PlanSolid[], left: readonly [number, number], from: number): number {
+  const inside = solids.map(({ outline }) => clipped(outline, { left, ahead: [from, from + TEE_SQUARE_MM] }));
+  return Math.min(
+    TEE_SQUARE_MM,
+    ...inside.filter((outline) => outline.length > 0).map((outline) => extent(outline, 1)[0] - from),
+  );
+}
+
+/** Clear width to both sides of the middle line between two depths; without bound where there is no such stretch. */
+function stemWidth(solids: readonly PlanSolid[], from: number, to: number): number {
+  if (to - from < NUDGE_MM) return TEE_SQUARE_MM;
+  const halves = solids
+    .map(({ outline }) => clipped(outline, { ahead: [from, to] }))
+    .filter((outline) => outline.length > 0)
+    .map((outline) => {
+      const [low, high] = extent(outline, 0);
+      return low > 0 ? low : high < 0 ? -high : 0;
+    });
+  return Math.min(TEE_SQUARE_MM, 2 * Math.min(Infinity, ...halves));
+}
+
+/**
+ * Clear floor beside the end of a bench, at the end that has more: along the end in a strip as wide as a wheelchair,
+ * and away from the end over the length of one.
+ *
+ * @param found - the survey
+ * @param bench - the bench
+ * @returns across, away from the end, and along the end; millimetres, held to 2 m
+ * @source ADA 903.2: at the end of the seat, parallel to its short axis
+ */
+export function endSpace(found: Survey, bench: PieceOf<'bench'>): { widthMm: number; lengthMm: number } {
+  const [strip, run] = FLOOR_MM;
+  const plan = planOfPiece(bench);
+  const front = benchLayout(bench).frontZMm;
+  const near = solidsNear(
+    found,
+    plan,
+    bench.lengthMm / 2 + FAR_MM + front,
+    (piece) => piece.id !== bench.id,
+    isInTheWay,
+  );
+  const ends = ([1, -1] as const).map((sign) => {
+    const beside = (across: number): [number, number] => {
+      const [near0, far] = [bench.lengthMm / 2 + NUDGE_MM, bench.lengthMm / 2 + across - NUDGE_MM];
+      return sign > 0 ? [near0, far] : [-far, -near0];
+    };
+    const lengthMm = stretchAround(near, beside(strip), front / 2);
+    // Slid along the end, rear lines in line or front lines in line, whichever leaves more.
+    const widthMm = Math.max(
+      ...[0, front - run].map((from) => clearAcross(near, beside(FAR_MM), [from, from + run])),
+    );
+    return { widthMm: Math.max(widthMm, lengthMm >= run ? strip : 0), lengthMm };
+  });
+  return ends.reduce((a, b) =>
+    Math.min(b.widthMm / strip, b.lengthMm / run) > Math.min(a.widthMm / strip, a.lengthMm / run) ? b : a,
+  );
+}
+
+/** Clear stretch along a strip around a depth. */
+function stretchAround(solids: readonly PlanSolid[], left: readonly [number, number], at: number): number {
+  let [low, high] = [at - FAR_MM, at + FAR_MM];
+  for (const { outline } of solids) {
+    const inside = clipped(outline, { left });
+    if (inside.length === 0) continue;
+    const [from, to] = extent(inside, 1);
+    if (from > at) high = Math.min(high, from);
+    else if (to < at) low = Math.max(low, to);
+    else return 0;
+  }
+  return Math.min(FAR_MM, high - low);
+}
+
+/** Clear width away from an end over a stretch. */
+function clearAcross(
+  solids: readonly PlanSolid[],
+  left: readonly [number, number],
+  ahead: readonly [number, number],
+): number {
+  const edge = Math.min(Math.abs(left[0]), Math.abs(left[1]));
+  const inside = solids
+    .map(({ outline }) => clipped(outline, { left, ahead: [ahead[0] + NUDGE_MM, ahead[1] - NUDGE_MM] }))
+    .filter((outline) => outline.length > 0)
+    .map((outline) => Math.min(...extent(outline, 0).map(Math.abs)) - edge);
+  return Math.min(FAR_MM, ...inside);
+}
