@@ -1,5 +1,7 @@
+import { useQuery } from '@tanstack/react-query';
 import { useParams } from 'react-router-dom';
-import type { Role } from './contract.ts';
+import { api } from './api-client.ts';
+import type { Role, Workshop } from './contract.ts';
 import { useSession } from './session.ts';
 
 export interface WorkshopAtHand {
@@ -23,4 +25,16 @@ export function useWorkshop(): WorkshopAtHand {
     canEdit: found.role === 'owner' || found.role === 'designer',
     isOwner: found.role === 'owner',
   };
+}
+
+export const workshopPath = (workshopId: string) => `/workshops/${workshopId}`;
+export const workshopKey = (workshopId: string) => ['workshops', workshopId] as const;
+export const settingsKey = (workshopId: string) => [...workshopKey(workshopId), 'settings'] as const;
+
+/** What the owner set for the whole workshop. */
+export function useWorkshopSettings(workshopId: string) {
+  return useQuery({
+    queryKey: settingsKey(workshopId),
+    queryFn: ({ signal }) => api.get<Workshop>(workshopPath(workshopId), { signal }),
+  });
 }

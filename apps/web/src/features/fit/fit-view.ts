@@ -6,6 +6,8 @@ import { createContext, useContext } from 'react';
 export interface FitView {
   sheet: FitSheet;
   ruleBook: RuleBook;
+  /** When the workshop last changed the probability that verdicts ask for, if it ever did. */
+  confidenceSetAt?: string | null;
   style: LengthStyle;
   /** `verdicts` for members who may not see what a verdict rests on. */
   detail: 'full' | 'verdicts';

@@ -1,4 +1,5 @@
-import { createBodyModel, loadRuleBook, type BodyModel, type RuleBook } from '@settlewright/anthropometry';
+import { createBodyModel, type BodyModel, type RuleBook } from '@settlewright/anthropometry';
+import { fetchRuleBook } from '@/lib/rule-book.ts';
 
 /** Body statistics and rules: data with their sources, fetched once when a room is opened. */
 export interface FitEngine {
@@ -7,9 +8,9 @@ export interface FitEngine {
 }
 
 export async function loadFitEngine(): Promise<FitEngine> {
-  const [summary, rules] = await Promise.all([
+  const [summary, ruleBook] = await Promise.all([
     import('@settlewright/seed-data/populations/ansur2.json'),
-    import('@settlewright/seed-data/fit-rules.json'),
+    fetchRuleBook(),
   ]);
-  return { model: createBodyModel(summary.default), ruleBook: loadRuleBook(rules.default) };
+  return { model: createBodyModel(summary.default), ruleBook };
 }

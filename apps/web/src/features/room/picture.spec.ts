@@ -52,6 +52,15 @@ function serverSheet(): ServerFitSheet {
 }
 
 describe('what follows from a document', () => {
+  it('asks of a verdict the probability that the workshop asks', () => {
+    const told: CastMember = { id: castId, name: 'Hetty Vance', role: '', colour: 3, bodyData: 'mixed' };
+    const at = (confidence: number | null) =>
+      createPictureMaker(engine, [told], { confidence }).check(document);
+    expect(at(null).confidence).toBe(engine.ruleBook.confidence);
+    expect(at(0.6).confidence).toBe(0.6);
+    expect(at(0.6).counts.notKnown).toBeLessThan(at(null).counts.notKnown);
+  });
+
   it('seats whoever sits there, drawn from their own measures', () => {
     const { bodies, sheet } = createPictureMaker(engine, [known]).picture(document);
     expect(bodies).toMatchObject([
@@ -71,7 +80,7 @@ describe('what follows from a document', () => {
   it('shows readers without measures the server’s verdicts and body, and draws no broken tape', () => {
     const { id, name, role, colour } = known;
     const server = serverSheet();
-    const picture = createPictureMaker(engine, [{ id, name, role, colour }], server).picture(document);
+    const picture = createPictureMaker(engine, [{ id, name, role, colour }], { server }).picture(document);
     expect(picture.sheet).toBe(server);
     expect(picture.bodies).toHaveLength(1);
     expect(picture.bodies[0]?.mesh.positions.every(Number.isFinite)).toBe(true);

@@ -88,10 +88,17 @@ function createBodyMaker() {
   };
 }
 
+interface PictureOptions {
+  /** The sheet as the server made it, for readers who may not see measures. */
+  server?: ServerFitSheet | undefined;
+  /** Probability that the workshop asks of a verdict; the rule book's when nothing is set. */
+  confidence?: number | null | undefined;
+}
+
 export function createPictureMaker(
   engine: FitEngine,
   cast: readonly CastMember[],
-  server?: ServerFitSheet,
+  { server, confidence }: PictureOptions = {},
 ): PictureMaker {
   const situations = new WeakMap<SetDocument, SetSituation>();
   const sheets = new WeakMap<SetDocument, FitSheet>();
@@ -113,7 +120,7 @@ export function createPictureMaker(
         sitters: sittersOf(document, cast, engine.model),
         ruleBook: engine.ruleBook,
         model: engine.model,
-        settings: document.asked,
+        settings: { ...document.asked, ...(typeof confidence === 'number' && { confidence }) },
       });
     sheets.set(document, sheet);
     return sheet;

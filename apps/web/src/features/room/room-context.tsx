@@ -18,6 +18,8 @@ export interface RoomSurroundings {
   cast: readonly CastMember[];
   engine: FitEngine;
   maker: PictureMaker;
+  /** When the workshop last changed the probability that verdicts ask for, if it ever did. */
+  confidenceSetAt?: string | null;
 }
 
 export const RoomContext = createContext<RoomSurroundings | null>(null);

@@ -18,6 +18,7 @@ export interface RoomForFit {
   document: SetDocument;
   sheet: FitSheet;
   ruleBook: RuleBook;
+  confidenceSetAt?: string | null;
   style: LengthStyle;
   detail: 'full' | 'verdicts';
   colourOf: (sitterId: string) => number;
@@ -35,7 +36,7 @@ export interface RoomForFit {
 }
 
 export function useRoomForFit(): RoomForFit {
-  const { engine, style, detail, canEdit, cast, maker } = useSurroundings();
+  const { engine, style, detail, canEdit, cast, maker, confidenceSetAt } = useSurroundings();
   const picture = usePicture();
   const store = useRoomStore();
   const litCellId = useRoom((state) => state.litCellId);
@@ -53,6 +54,7 @@ export function useRoomForFit(): RoomForFit {
       document: picture.document,
       sheet: picture.sheet,
       ruleBook: engine.ruleBook,
+      confidenceSetAt: confidenceSetAt ?? null,
       style,
       detail,
       colourOf: (sitterId) => {
@@ -94,6 +96,7 @@ export function useRoomForFit(): RoomForFit {
     store,
     canEdit,
     maker,
+    confidenceSetAt,
     actions,
     clientView,
     fitOpen,

@@ -1,16 +1,10 @@
 import { useMutation, useQuery, useQueryClient } from '@tanstack/react-query';
 import { api } from '@/lib/api-client.ts';
+import { settingsKey, workshopKey, workshopPath } from '@/lib/workshop.ts';
 import type { Invitation, Member, Page, Role, Upholsterer, Workshop } from '@/lib/contract.ts';
 
-const path = (workshopId: string) => `/workshops/${workshopId}`;
-const key = (workshopId: string, part: string) => ['workshops', workshopId, part] as const;
-
-export function useWorkshopSettings(workshopId: string) {
-  return useQuery({
-    queryKey: key(workshopId, 'settings'),
-    queryFn: ({ signal }) => api.get<Workshop>(path(workshopId), { signal }),
-  });
-}
+const path = workshopPath;
+const key = (workshopId: string, part: string) => [...workshopKey(workshopId), part] as const;
 
 export function useMembers(workshopId: string) {
   return useQuery({
@@ -50,10 +44,19 @@ function useChange<Input, Answer = void>(
   });
 }
 
-export const useSaveSettings = (workshopId: string) =>
-  useChange(workshopId, 'settings', (input: Pick<Workshop, 'name' | 'telephone' | 'paper' | 'timeZone'>) =>
-    api.patch<Workshop>(path(workshopId), input),
-  );
+type Settings = Pick<Workshop, 'name' | 'telephone' | 'paper' | 'timeZone' | 'confidence'>;
+
+/** Settings reach what the server counts and prints, so everything of the workshop is read again. */
+export function useSaveSettings(workshopId: string) {
+  const client = useQueryClient();
+  return useMutation({
+    mutationFn: (input: Partial<Settings>) => api.patch<Workshop>(path(workshopId), input),
+    onSuccess: (saved) => {
+      client.setQueryData(settingsKey(workshopId), saved);
+      return client.invalidateQueries({ queryKey: workshopKey(workshopId) });
+    },
+  });
+}
 
 export const useChangeRole = (workshopId: string) =>
   useChange(workshopId, 'members', ({ userId, role }: { userId: string; role: Role }) =>

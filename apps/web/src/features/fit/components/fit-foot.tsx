@@ -3,7 +3,7 @@ import { Link } from 'react-router-dom';
 import { classNames } from '@/components/class-names.ts';
 import { OpenIcon } from '@/components/icons.tsx';
 import { FitGrid } from './fit-grid.tsx';
-import { FitCaution } from './fit-key.tsx';
+import { FitCaution, FitConfidence } from './fit-key.tsx';
 import { FitPeople } from './fit-people.tsx';
 import { FitStrip } from './fit-strip.tsx';
 
@@ -67,8 +67,11 @@ export function FitFoot({ isOpen, onToggle, shortcut, line, pageTo }: FitFootPro
           <div className="tablet:hidden">
             <FitPeople />
           </div>
-          <div className="shrink-0 py-1.5 max-desk:hidden">
-            <FitCaution small />
+          <div className="shrink-0 py-1.5">
+            <FitConfidence small />
+            <div className="max-desk:hidden">
+              <FitCaution small />
+            </div>
           </div>
         </section>
       )}

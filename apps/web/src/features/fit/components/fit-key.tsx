@@ -1,3 +1,7 @@
+import { confidenceWords } from '@settlewright/anthropometry';
+import { dayWords } from '@/lib/dates.ts';
+import { useFitView } from '../fit-view.ts';
+
 /** What the signs on the sheet mean; stands on every page that shows it. */
 export function FitKey() {
   return (
@@ -16,6 +20,17 @@ export function FitCaution({ small = false }: { small?: boolean }) {
     <p className={small ? 'text-xs text-ink-2' : 'text-sm text-ink-2'}>
       Guidance, not certification. Local codes, the authority having jurisdiction and licensed practice
       decide. Body data describe surveyed groups, not a person: try the seat.
+    </p>
+  );
+}
+
+/** How sure the verdicts of this sheet are, and since when the workshop asks that. */
+export function FitConfidence({ small = false }: { small?: boolean }) {
+  const { sheet, ruleBook, confidenceSetAt } = useFitView();
+  const since = confidenceSetAt ? `set by the workshop on ${dayWords(confidenceSetAt)}` : undefined;
+  return (
+    <p className={small ? 'text-xs text-ink-2' : 'text-sm text-ink-2'}>
+      {confidenceWords(sheet.confidence, ruleBook, since)}
     </p>
   );
 }

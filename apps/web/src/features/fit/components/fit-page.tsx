@@ -12,7 +12,7 @@ import type { RowOrder } from '../columns.ts';
 import { useFitView } from '../fit-view.ts';
 import { CountedApart } from './counted-apart.tsx';
 import { FitGrid } from './fit-grid.tsx';
-import { FitCaution, FitKey } from './fit-key.tsx';
+import { FitCaution, FitConfidence, FitKey } from './fit-key.tsx';
 import { FitPeople } from './fit-people.tsx';
 import { PiecesAndWays } from './pieces-and-ways.tsx';
 
@@ -107,7 +107,10 @@ export function FitPage({ roomTo, papersAt }: FitPageProps) {
         <p className="text-sm text-ink-2 max-tablet:hidden">
           Arrow keys move between cells, Enter opens one, Escape closes it.
         </p>
-        <FitCaution />
+        <div className="grid gap-1">
+          <FitConfidence />
+          <FitCaution />
+        </div>
       </div>
     </div>
   );

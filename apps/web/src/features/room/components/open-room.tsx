@@ -7,7 +7,7 @@ import { usePageTitle } from '@/lib/page-title.ts';
 import { sayProblem } from '@/lib/problem.ts';
 import { useSession } from '@/lib/session.ts';
 import { useUnitStyle } from '@/lib/unit-choice.ts';
-import { useWorkshop } from '@/lib/workshop.ts';
+import { useWorkshop, useWorkshopSettings } from '@/lib/workshop.ts';
 import { useCast, useServerFitSheet, useSetInfo, type SetPath } from '../api.ts';
 import { loadFitEngine } from '../engine.ts';
 import { useOpenedSet } from '../hooks/use-opened-set.ts';
@@ -28,16 +28,20 @@ export function OpenRoom({ path, children }: OpenRoomProps) {
   const info = useSetInfo(path);
   const cast = useCast(path);
   const engine = useQuery({ queryKey: ['fit-engine'], queryFn: loadFitEngine, staleTime: Infinity });
+  const settings = useWorkshopSettings(path.workshopId);
   const server = useServerFitSheet(path, !canEdit);
   const opened = useOpenedSet(path, userId, canEdit);
   usePageTitle(info.data?.name);
 
   const maker = useMemo(
     () =>
-      engine.data && (canEdit || server.data)
-        ? createPictureMaker(engine.data, cast.data ?? [], canEdit ? undefined : server.data)
+      engine.data && (canEdit ? settings.data : server.data)
+        ? createPictureMaker(engine.data, cast.data ?? [], {
+            confidence: settings.data?.confidence,
+            server: canEdit ? undefined : server.data,
+          })
         : undefined,
-    [engine.data, cast.data, canEdit, server.data],
+    [engine.data, cast.data, canEdit, server.data, settings.data],
   );
   const surroundings = useMemo<RoomSurroundings | undefined>(
     () =>
@@ -51,12 +55,16 @@ export function OpenRoom({ path, children }: OpenRoomProps) {
             cast: cast.data ?? [],
             engine: engine.data,
             maker,
+            confidenceSetAt: settings.data?.confidenceSetAt ?? null,
           }
         : undefined,
-    [path, info.data, canEdit, style, cast.data, engine.data, maker, opened],
+    [path, info.data, canEdit, style, cast.data, engine.data, maker, opened, settings.data],
   );
 
-  const trouble = opened.kind === 'failed' ? opened.error : (engine.error ?? server.error);
+  const trouble =
+    opened.kind === 'failed'
+      ? opened.error
+      : (engine.error ?? server.error ?? (settings.data ? null : settings.error));
   if (trouble) {
     return (
       <div className="page">

@@ -1,3 +1,4 @@
+import { confidenceWords } from '@settlewright/anthropometry';
 import { useQuery } from '@tanstack/react-query';
 import { useMemo, useState } from 'react';
 import { Button } from '@/components/button.tsx';
@@ -18,7 +19,7 @@ import { createRoomStore, RoomStoreContext } from '../store.ts';
 import { ApprovalForm } from './approval-form.tsx';
 import { KeyPlan } from './key-plan.tsx';
 import { PiecesPanel } from './pieces-panel.tsx';
-import { momentWords } from '@/lib/dates.ts';
+import { dayWords, momentWords } from '@/lib/dates.ts';
 import { SceneStage } from './scene-stage.tsx';
 import { SpecSentence } from './spec-sentence.tsx';
 
@@ -52,7 +53,7 @@ function Frozen({ path, setName, revision }: { path: SetPath; setName: string; r
             style,
             cast: cast.data,
             engine: engine.data,
-            maker: createPictureMaker(engine.data, cast.data, revision.fitSheet),
+            maker: createPictureMaker(engine.data, cast.data, { server: revision.fitSheet }),
           }
         : undefined,
     [path, setName, style, revision, engine.data, cast.data],
@@ -69,6 +70,15 @@ function Frozen({ path, setName, revision }: { path: SetPath; setName: string; r
         <VerdictCounts counts={revision.counts} />
         <Papers path={path} letter={revision.letter} />
       </div>
+      {engine.data && (
+        <p className="mt-1 text-sm text-ink-2">
+          {confidenceWords(
+            revision.fitSheet.confidence,
+            engine.data.ruleBook,
+            `as in force when issued on ${dayWords(revision.issuedAt)}`,
+          )}
+        </p>
+      )}
       <ApprovalForm path={path} revision={revision} />
       {surroundings ? (
         <RoomContext value={surroundings}>

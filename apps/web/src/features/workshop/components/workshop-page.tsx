@@ -4,8 +4,8 @@ import { PaleBars } from '@/components/loading.tsx';
 import { RuleHeading } from '@/components/rule-heading.tsx';
 import { usePageTitle } from '@/lib/page-title.ts';
 import { sayProblem } from '@/lib/problem.ts';
-import { useWorkshop } from '@/lib/workshop.ts';
-import { useWorkshopSettings } from '../api.ts';
+import { useWorkshop, useWorkshopSettings } from '@/lib/workshop.ts';
+import { ConfidenceForm } from './confidence-form.tsx';
 import { Members } from './members.tsx';
 import { SettingsForm } from './settings-form.tsx';
 import { Upholsterers } from './upholsterers.tsx';
@@ -22,12 +22,20 @@ export function WorkshopPage() {
           <Members workshop={workshop} />
           <Upholsterers workshop={workshop} />
         </div>
-        <section>
-          <RuleHeading className="mb-4">Title block and paper</RuleHeading>
-          {settings.isPending && <PaleBars words="Loading the workshop" />}
-          {settings.isError && <Notice tone="wont">{sayProblem(settings.error)}</Notice>}
-          {settings.data && <SettingsForm workshop={settings.data} canChange={workshop.isOwner} />}
-        </section>
+        <div className="grid grid-cols-[minmax(0,1fr)] gap-10">
+          <section>
+            <RuleHeading className="mb-4">Title block and paper</RuleHeading>
+            {settings.isPending && <PaleBars words="Loading the workshop" />}
+            {settings.isError && <Notice tone="wont">{sayProblem(settings.error)}</Notice>}
+            {settings.data && <SettingsForm workshop={settings.data} canChange={workshop.isOwner} />}
+          </section>
+          {settings.data && (
+            <section>
+              <RuleHeading className="mb-4">How sure a verdict is</RuleHeading>
+              <ConfidenceForm workshop={settings.data} canChange={workshop.isOwner} />
+            </section>
+          )}
+        </div>
       </div>
     </div>
   );
