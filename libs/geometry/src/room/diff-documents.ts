@@ -188,13 +188,13 @@ function noteDifferences(
   mine: SetDocument,
   theirs: SetDocument,
 ): DocumentDifference[] {
-  const text = (document: SetDocument | null, id: string) =>
-    document?.knownDifferences.find((note) => note.id === id)?.text;
+  const written = (document: SetDocument | null, id: string) =>
+    document?.knownDifferences.find((note) => note.id === id);
   const ids = new Set([...theirs.knownDifferences, ...mine.knownDifferences].map(({ id }) => id));
   return [...ids].flatMap((id) =>
     compared(
       { id: `note:${id}`, kind: 'known-difference', key: id, label: 'Known difference' },
-      { base: text(base, id), mine: text(mine, id), theirs: text(theirs, id) },
+      { base: written(base, id), mine: written(mine, id), theirs: written(theirs, id) },
       base !== null,
     ),
   );

@@ -201,7 +201,18 @@ export const setDocumentSchema = z.strictObject({
     /** Spaces kept among fixed seats (ACC-10). */
     wheelchairSpaces: z.number().int().min(0).max(500).optional(),
   }),
-  knownDifferences: z.array(z.strictObject({ id: z.string().min(1).max(40), text: text(1000) })).max(200),
+  knownDifferences: z
+    .array(
+      z.strictObject({
+        id: z.string().min(1).max(40),
+        text: text(1000),
+        /** Why it is kept, who said so, and on which day (YYYY-MM-DD); absent where nobody wrote it down. */
+        reason: text(1000).optional(),
+        by: text(120).optional(),
+        on: z.iso.date().optional(),
+      }),
+    )
+    .max(200),
 });
 
 export type SetDocument = z.infer<typeof setDocumentSchema>;
