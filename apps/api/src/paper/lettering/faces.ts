@@ -9,18 +9,17 @@ export type Weight = 300 | 400 | 600;
 const FACES = ['Work Sans', 'DejaVu Sans'] as const;
 export type Face = (typeof FACES)[number];
 
-const WORK_SANS = '@expo-google-fonts/work-sans';
-const DEJAVU = 'dejavu-fonts-ttf/ttf';
+const DEJAVU = require.resolve('dejavu-fonts-ttf/ttf/DejaVuSans.ttf');
 const FILES: Record<Face, Record<Weight, string>> = {
   'Work Sans': {
-    300: `${WORK_SANS}/300Light/WorkSans_300Light.ttf`,
-    400: `${WORK_SANS}/400Regular/WorkSans_400Regular.ttf`,
-    600: `${WORK_SANS}/600SemiBold/WorkSans_600SemiBold.ttf`,
+    300: require.resolve('@expo-google-fonts/work-sans/300Light/WorkSans_300Light.ttf'),
+    400: require.resolve('@expo-google-fonts/work-sans/400Regular/WorkSans_400Regular.ttf'),
+    600: require.resolve('@expo-google-fonts/work-sans/600SemiBold/WorkSans_600SemiBold.ttf'),
   },
   'DejaVu Sans': {
-    300: `${DEJAVU}/DejaVuSans.ttf`,
-    400: `${DEJAVU}/DejaVuSans.ttf`,
-    600: `${DEJAVU}/DejaVuSans-Bold.ttf`,
+    300: DEJAVU,
+    400: DEJAVU,
+    600: require.resolve('dejavu-fonts-ttf/ttf/DejaVuSans-Bold.ttf'),
   },
 };
 
@@ -36,7 +35,7 @@ const files = new Map<string, FontFile>();
 function readFile(name: string): FontFile {
   let file = files.get(name);
   if (!file) {
-    const bytes = readFileSync(require.resolve(name));
+    const bytes = readFileSync(name);
     file = { base64: withoutGlyphNames(bytes).toString('base64'), advances: readAdvances(bytes) };
     files.set(name, file);
   }
@@ -90,8 +89,8 @@ export function useFace(doc: jsPDF, face: Face, weight: Weight, size: number): v
   const name = basename(file, '.ttf');
   const known = registered.get(doc) ?? new Set();
   if (!known.has(name)) {
-    doc.addFileToVFS(file, readFile(file).base64);
-    doc.addFont(file, name, 'normal');
+    doc.addFileToVFS(name, readFile(file).base64);
+    doc.addFont(name, name, 'normal');
     registered.set(doc, known.add(name));
   }
   doc.setFont(name, 'normal');
