@@ -79,7 +79,7 @@ export function collectPredicted(amount: Amount, found: PredictedMeasure[]): voi
   }
 }
 
-/** More components than this are taken together into one normal of the same mean and spread. */
+/** More components than this are taken together into one of the same mean, spread and skew. */
 const MOST_COMPONENTS = 8;
 
 /**
@@ -109,6 +109,7 @@ export function jointOf(amounts: readonly Amount[]): JointComponent[] {
       weight: 1,
       means: amounts.map(({ constant }) => constant),
       covariances: amounts.map(() => amounts.map(() => 0)),
+      thirds: amounts.map(() => 0),
     },
   ];
   for (const body of bodies) {
@@ -125,6 +126,7 @@ const added = (a: JointComponent, b: JointComponent): JointComponent => ({
   weight: a.weight * b.weight,
   means: a.means.map((mean, i) => mean + (b.means[i] as number)),
   covariances: a.covariances.map((row, i) => row.map((c, j) => c + (b.covariances[i]?.[j] as number))),
+  thirds: a.thirds.map((third, i) => third + (b.thirds[i] as number)),
 });
 
 function takenTogether(components: readonly JointComponent[]): JointComponent {
@@ -144,5 +146,12 @@ function takenTogether(components: readonly JointComponent[]): JointComponent {
       ),
     ),
   );
-  return { weight: 1, means, covariances };
+  const thirds = indexes.map((i) =>
+    components.reduce((sum, c) => {
+      const off = (c.means[i] as number) - (means[i] as number);
+      const variance = c.covariances[i]?.[i] as number;
+      return sum + c.weight * ((c.thirds[i] as number) + 3 * off * variance + off ** 3);
+    }, 0),
+  );
+  return { weight: 1, means, covariances, thirds };
 }

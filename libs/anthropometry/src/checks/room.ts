@@ -1,5 +1,13 @@
 import { bivariateNormalCdf } from '../people/bivariate.ts';
 import { normalCdf, normalQuantile } from '../people/normal.ts';
+import {
+  shapeOf,
+  skewOf,
+  standardCorrelation,
+  standardOf,
+  valueAt,
+  type Shape,
+} from '../people/shifted-lognormal.ts';
 import { jointOf, minus, type Amount } from './amount.ts';
 
 /** Two lines that a value should keep between; either may be open. */
@@ -8,11 +16,13 @@ export interface Band {
   upper?: Amount;
 }
 
-/** Room to the lines of a band: two correlated normals per component, or one where a side is open. */
+/**
+ * Room to the lines of a band: two shapes per component, or one where a side is open. The standard normal numbers
+ * under two shapes are correlated.
+ */
 export interface Room {
   weight: number;
-  means: number[];
-  sds: number[];
+  shapes: Shape[];
   correlation: number;
 }
 
@@ -27,12 +37,18 @@ export function roomWithin(value: Amount, band: Band): Room[] {
   const sides: Amount[] = [];
   if (band.lower) sides.push(minus(value, band.lower));
   if (band.upper) sides.push(minus(band.upper, value));
-  return jointOf(sides).map(({ weight, means, covariances }) => {
-    const sds = covariances.map((row, i) => Math.sqrt(row[i] as number));
-    const [first = 0, second = 0] = sds;
-    const both = first > 0 && second > 0;
-    const correlation = both ? (covariances[0]?.[1] as number) / (first * second) : 0;
-    return { weight, means, sds, correlation: Math.max(-1, Math.min(1, correlation)) };
+  return jointOf(sides).map(({ weight, means, covariances, thirds }) => {
+    const shapes = means.map((mean, i) => {
+      const variance = covariances[i]?.[i] as number;
+      return shapeOf(mean, Math.sqrt(variance), skewOf(variance, thirds[i] as number));
+    });
+    const [first, second] = shapes;
+    let correlation = 0;
+    if (first && second && first.sd > 0 && second.sd > 0) {
+      const together = (covariances[0]?.[1] as number) / (first.sd * second.sd);
+      correlation = standardCorrelation(first, second, Math.max(-1, Math.min(1, together)));
+    }
+    return { weight, shapes, correlation };
   });
 }
 
@@ -49,10 +65,9 @@ export function roomMoved(rooms: readonly Room[], from: Band, to: Band): Room[] 
   const moves: number[] = [];
   if (from.lower && to.lower) moves.push(from.lower.constant - to.lower.constant);
   if (from.upper && to.upper) moves.push(to.upper.constant - from.upper.constant);
-  return rooms.map(({ weight, means, sds, correlation }) => ({
+  return rooms.map(({ weight, shapes, correlation }) => ({
     weight,
-    means: means.map((mean, i) => mean + (moves[i] as number)),
-    sds,
+    shapes: shapes.map((shape, i) => ({ ...shape, mean: shape.mean + (moves[i] as number) })),
     correlation,
   }));
 }
@@ -66,9 +81,9 @@ export function roomMoved(rooms: readonly Room[], from: Band, to: Band): Room[] 
  */
 export function probabilityOfRoom(rooms: readonly Room[], least: number): number {
   let sum = 0;
-  for (const { weight, means, sds, correlation } of rooms) {
-    const h = standardRoom(means[0] as number, sds[0] as number, least);
-    const k = means.length > 1 ? standardRoom(means[1] as number, sds[1] as number, least) : Infinity;
+  for (const { weight, shapes, correlation } of rooms) {
+    const h = standardRoom(shapes[0] as Shape, least);
+    const k = shapes.length > 1 ? standardRoom(shapes[1] as Shape, least) : Infinity;
     if (h === -Infinity || k === -Infinity) continue;
     if (h === Infinity) sum += weight * (k === Infinity ? 1 : normalCdf(k));
     else if (k === Infinity) sum += weight * normalCdf(h);
@@ -77,9 +92,9 @@ export function probabilityOfRoom(rooms: readonly Room[], least: number): number
   return Math.min(1, sum);
 }
 
-function standardRoom(mean: number, sd: number, least: number): number {
-  if (sd > 0) return (mean - least) / sd;
-  return mean >= least ? Infinity : -Infinity;
+function standardRoom(shape: Shape, least: number): number {
+  if (shape.sd > 0) return -standardOf(shape, least);
+  return shape.mean >= least ? Infinity : -Infinity;
 }
 
 const STEPS = 60;
@@ -99,10 +114,10 @@ export function roomQuantile(rooms: readonly Room[], p: 0.05 | 0.95, tolerance =
   const half = standardQuantile(p / 2);
   let low = Infinity;
   let high = -Infinity;
-  for (const { means, sds } of rooms) {
-    const z = means.length > 1 ? half : whole;
-    low = Math.min(low, leastAt(means, sds, z));
-    high = Math.max(high, leastAt(means, sds, whole));
+  for (const { shapes } of rooms) {
+    const z = shapes.length > 1 ? half : whole;
+    low = Math.min(low, leastAt(shapes, z));
+    high = Math.max(high, leastAt(shapes, whole));
   }
   // Regula falsi with halved ends, and a plain halving every third step.
   let fLow = 1 - probabilityOfRoom(rooms, low) - p;
@@ -140,5 +155,5 @@ function standardQuantile(p: number): number {
   return z;
 }
 
-const leastAt = (means: readonly number[], sds: readonly number[], z: number): number =>
-  means.reduce((least, mean, i) => Math.min(least, mean + z * (sds[i] as number)), Infinity);
+const leastAt = (shapes: readonly Shape[], z: number): number =>
+  shapes.reduce((least, shape) => Math.min(least, valueAt(shape, z)), Infinity);

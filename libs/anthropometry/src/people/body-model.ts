@@ -1,8 +1,9 @@
 import { MEASURE_KEYS, type MeasureKey } from '../measures/measures.ts';
 import { surveyPercentile } from '../populations/percentiles.ts';
-import { readSurvey, type SurveyGroup } from '../populations/survey.ts';
-import { bodyFrom, type Body, type WeightedPosterior } from './body.ts';
-import { createGroupModel, type Observation } from './group-model.ts';
+import { readSurvey, type Survey, type SurveyGroup } from '../populations/survey.ts';
+import { bodyFrom, type Body } from './body.ts';
+import { momentsOfBody, type WeightedPosterior } from './body-moments.ts';
+import { createGroupModel, type GroupModel, type Observation, type Posterior } from './group-model.ts';
 import type { BodyData, KnownPerson, PercentileMannequin } from './person.ts';
 
 /** Predicts bodies from what is known of people. */
@@ -39,7 +40,8 @@ export interface BodyModel {
  * @param summary - parsed JSON of the survey statistics, for example `seed-data/populations/ansur2.json`
  * @returns the model; it keeps its factorisations and predictions, and is otherwise pure
  * @throws Error naming the field when the statistics do not hold together
- * @source each sex a multivariate normal of the survey's means, spreads and correlations
+ * @source each sex a multivariate normal in logs (elbow rest height plain), the spread of what is left over growing
+ *   with weight as fitted to the survey
  */
 export function createBodyModel(summary: unknown): BodyModel {
   const survey = readSurvey(summary);
@@ -47,11 +49,19 @@ export function createBodyModel(summary: unknown): BodyModel {
   const bodies = new WeakMap<KnownPerson, Body>();
   const mannequins = new Map<string, KnownPerson>();
 
-  const partOf = (group: SurveyGroup, person: KnownPerson): WeightedPosterior => ({
-    weight: 1,
-    group: groups[group],
-    posterior: groups[group].condition(observationsOf(person, survey.selfReportedStature[group])),
-  });
+  const partOf = (name: SurveyGroup, person: KnownPerson): WeightedPosterior => {
+    const group = groups[name];
+    const posterior = group.condition(observationsOf(person, survey.selfReportedStature[name]));
+    const shift = shiftByAge(survey, name, person, group, posterior);
+    return {
+      weight: 1,
+      name,
+      group,
+      posterior,
+      shift,
+      moments: momentsOfBody(group, posterior, shift),
+    };
+  };
 
   function partsOf(person: KnownPerson): WeightedPosterior[] {
     if (person.bodyData !== 'mixed') return [partOf(person.bodyData, person)];
@@ -90,6 +100,29 @@ export function createBodyModel(summary: unknown): BodyModel {
     },
     percentile: (bodyData, key, p) => surveyPercentile(survey, bodyData, key, p),
   };
+}
+
+const NO_SHIFT: ReadonlyMap<number, number> = new Map();
+
+/** Millimetres that age adds, by place; nothing where stature or weight is not known or the measure was taken. */
+function shiftByAge(
+  { ageShift }: Survey,
+  group: SurveyGroup,
+  { age, stature, weightKg, measured }: KnownPerson,
+  { keys }: GroupModel,
+  { taken }: Posterior,
+): ReadonlyMap<number, number> {
+  if (age === undefined || !ageShift) return NO_SHIFT;
+  if (!Number.isFinite(age) || age <= 0) throw new RangeError(`age is ${age}; accepted: a number above 0`);
+  const sized = (stature ?? measured.stature) !== undefined && (weightKg ?? measured.weight_kg) !== undefined;
+  const years = Math.min(age, ageShift.toYears) - ageShift.fromYears;
+  if (!sized || years <= 0) return NO_SHIFT;
+  const shift = new Map<number, number>();
+  keys.forEach((key, place) => {
+    const perYear = ageShift.perYear[group][key];
+    if (perYear !== undefined && !taken.has(place)) shift.set(place, perYear * years);
+  });
+  return shift;
 }
 
 /** Known values in a fixed order, so that people known by the same measures share one factorisation. */

@@ -1,15 +1,20 @@
 import { MEASURE_KEYS, type MeasureKey } from '../measures/measures.ts';
-import type { GroupModel, Posterior } from './group-model.ts';
+import type { Draws } from '../populations/population.ts';
+import type { WeightedPosterior } from './body-moments.ts';
+import { samplePerson } from './sample.ts';
+import { skewOf } from './shifted-lognormal.ts';
 import type { Estimate, KnownPerson, Linear } from './person.ts';
 
 /** Measures with their factors; the list form of a linear combination without a constant. */
 export type Combination = readonly (readonly [key: MeasureKey, factor: number])[];
 
-/** Means and covariances of several linear combinations under one group. */
+/** Means, covariances and third central moments of several linear combinations under one group. */
 export interface JointComponent {
   weight: number;
   means: number[];
   covariances: number[][];
+  /** Of each combination by itself. */
+  thirds: number[];
 }
 
 /** What is believed of one person's measures. */
@@ -21,7 +26,7 @@ export interface Body {
    * What is believed of a measure, or of a linear combination of measures.
    *
    * @param x - measure, or combination with its constant in millimetres
-   * @returns mixture of normals in millimetres (kilograms for weight alone)
+   * @returns mixture of shifted lognormals in millimetres (kilograms for weight alone)
    */
   estimate(x: MeasureKey | Linear): Estimate;
   /** Several combinations together, with their correlation. */
@@ -32,16 +37,22 @@ export interface Body {
   means(): Record<MeasureKey, number>;
   /** True when the value was taken from the person (or the person is a percentile mannequin). */
   isMeasured(key: MeasureKey): boolean;
+  /**
+   * People as this one may be: known values as they are, the others drawn together.
+   *
+   * @param count - people, 1 or more
+   * @param seed - whole number; the same people for the same seed
+   * @returns columns in millimetres (kilograms for weight)
+   * @throws RangeError when count or seed is out of range
+   */
+  sample(count: number, seed: number): Draws;
 }
 
-/** One group's belief with its share. */
-export interface WeightedPosterior {
-  weight: number;
-  group: GroupModel;
-  posterior: Posterior;
+/** A combination in the order of a group's matrix; a derived measure that was taken is a constant. */
+interface SparseRow {
+  constant: number;
+  parts: readonly (readonly [index: number, factor: number])[];
 }
-
-type SparseRow = readonly (readonly [number, number])[];
 
 /** Below this variance, in square millimetres, only rounding of the matrix algebra is left. */
 const ROUNDING_VARIANCE = 1e-6;
@@ -61,23 +72,42 @@ export function bodyFrom(person: KnownPerson, parts: readonly WeightedPosterior[
     (key === 'weight_kg' && person.weightKg !== undefined);
 
   const sparse = (part: WeightedPosterior, combination: Combination): SparseRow => {
-    const row: [number, number][] = [];
+    const parts: [number, number][] = [];
+    let constant = 0;
     for (const [key, factor] of combination) {
       if (factor === 0) continue;
-      for (const [index, share] of part.group.rowOf(key)) row.push([index, share * factor]);
+      const row = part.group.rowOf(key);
+      const taken = row.length > 1 ? person.measured[key] : undefined;
+      if (taken !== undefined) constant += factor * taken;
+      else for (const [index, share] of row) parts.push([index, share * factor]);
     }
-    return row;
+    return { constant, parts };
   };
-  const meanOf = (part: WeightedPosterior, row: SparseRow): number => {
-    let sum = 0;
-    for (const [index, weight] of row) sum += weight * (part.posterior.mean[index] as number);
+  const meanOf = ({ moments }: WeightedPosterior, { constant, parts }: SparseRow): number => {
+    let sum = constant;
+    for (const [index, factor] of parts) sum += factor * moments.mean(index);
     return sum;
   };
-  const covarianceOf = (part: WeightedPosterior, a: SparseRow, b: SparseRow): number => {
+  const covarianceOf = ({ moments }: WeightedPosterior, a: SparseRow, b: SparseRow): number => {
     if (person.exact) return 0;
     let sum = 0;
-    for (const [i, u] of a) {
-      for (const [j, v] of b) sum += u * v * (part.posterior.covariance[i * part.group.size + j] as number);
+    for (const [i, u] of a.parts) {
+      for (const [j, v] of b.parts) sum += u * v * moments.covariance(i, j);
+    }
+    return sum;
+  };
+  const thirdOf = ({ moments }: WeightedPosterior, { parts }: SparseRow): number => {
+    let sum = 0;
+    for (let a = 0; a < parts.length; a += 1) {
+      const [i, u] = parts[a] as SparseRow['parts'][number];
+      for (let b = 0; b <= a; b += 1) {
+        const [j, v] = parts[b] as SparseRow['parts'][number];
+        for (let c = 0; c <= b; c += 1) {
+          const [k, w] = parts[c] as SparseRow['parts'][number];
+          const ways = a === c ? 1 : a === b || b === c ? 3 : 6;
+          sum += ways * u * v * w * moments.third(i, j, k);
+        }
+      }
     }
     return sum;
   };
@@ -102,7 +132,8 @@ export function bodyFrom(person: KnownPerson, parts: readonly WeightedPosterior[
           (covariances[j] as number[])[i] = 0;
         }
       }
-      return { weight: part.weight, means, covariances };
+      const thirds = rows.map((row, i) => (covariances[i]?.[i] === 0 ? 0 : thirdOf(part, row)));
+      return { weight: part.weight, means, covariances, thirds };
     });
 
   const bests = new Map<MeasureKey, number>();
@@ -110,7 +141,7 @@ export function bodyFrom(person: KnownPerson, parts: readonly WeightedPosterior[
     const known = bests.get(key);
     if (known !== undefined) return known;
     let sum = 0;
-    for (const part of parts) sum += part.weight * meanOf(part, part.group.rowOf(key));
+    for (const part of parts) sum += part.weight * meanOf(part, sparse(part, [[key, 1]]));
     bests.set(key, sum);
     return sum;
   };
@@ -125,11 +156,15 @@ export function bodyFrom(person: KnownPerson, parts: readonly WeightedPosterior[
         typeof x === 'string' ? [[x, 1]] : (Object.entries(x.weights) as [MeasureKey, number][]);
       const constant = typeof x === 'string' ? 0 : x.constant;
       return {
-        components: joint([combination]).map(({ weight, means, covariances }) => ({
-          weight,
-          mean: constant + (means[0] as number),
-          sd: Math.sqrt(covariances[0]?.[0] as number),
-        })),
+        components: joint([combination]).map(({ weight, means, covariances, thirds }) => {
+          const variance = covariances[0]?.[0] as number;
+          return {
+            weight,
+            mean: constant + (means[0] as number),
+            sd: Math.sqrt(variance),
+            skew: skewOf(variance, thirds[0] as number),
+          };
+        }),
         measured: combination.every(([key, factor]) => factor === 0 || isMeasured(key)),
       };
     },
@@ -138,5 +173,9 @@ export function bodyFrom(person: KnownPerson, parts: readonly WeightedPosterior[
     means: () =>
       Object.fromEntries(MEASURE_KEYS.map((key) => [key, mean(key)])) as Record<MeasureKey, number>,
     isMeasured,
+    sample(count, seed) {
+      const fixed = MEASURE_KEYS.filter(isMeasured).map((key) => [key, mean(key)] as const);
+      return samplePerson(parts, new Map(fixed), count, seed);
+    },
   };
 }

@@ -15,6 +15,8 @@ export interface KnownPerson {
   bodyData: BodyData;
   stature?: { mm: number; source: 'measured' | 'told' };
   weightKg?: number;
+  /** Years; moves a few measures of a person of known stature and weight, where the survey says by how much. */
+  age?: number;
   /** Values taken with a tape. */
   measured: Partial<Record<MeasureKey, number>>;
   /** Height the shoe adds under the heel. */
@@ -35,16 +37,18 @@ export interface PercentileMannequin {
   percentile: number;
 }
 
-/** One normal component of an estimate; `sd` is 0 for a measured value. */
+/** One component of an estimate; `sd` is 0 for a measured value. */
 export interface EstimateComponent {
   weight: number;
   mean: number;
   sd: number;
+  /** Third standardised moment: above 0 where large values reach further than small ones. */
+  skew: number;
 }
 
 /**
- * What is believed of a linear combination of a person's measures: a mixture of normals
- * (one component when the sex is known, two when it is not).
+ * What is believed of a linear combination of a person's measures: a mixture of
+ * shifted lognormals (one component when the sex is known, two when it is not).
  */
 export interface Estimate {
   components: EstimateComponent[];

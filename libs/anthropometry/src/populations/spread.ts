@@ -112,7 +112,7 @@ function fitFactors(
   }
   let sum = 0;
   for (let row = 0; row < n; row += 1) sum += Math.exp(logVariance(row));
-  factors[0] = (factors[0]) - Math.log(sum / n);
+  factors[0] = factors[0] - Math.log(sum / n);
   return factors.map((x) => digits(x, 5)) as unknown as SpreadFactors;
 }
 
