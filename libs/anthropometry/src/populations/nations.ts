@@ -1,5 +1,5 @@
 import { z } from 'zod';
-import { MEASURE_KEYS, type MeasureKey } from '../measures/measures.ts';
+import { MEASURE_KEYS } from '../measures/measures.ts';
 import { normalQuantile } from '../people/normal.ts';
 import { fillGaps } from './fill-gaps.ts';
 import { populationOf } from './mix.ts';
