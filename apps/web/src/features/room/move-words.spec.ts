@@ -1,6 +1,6 @@
 import type { LengthStyle } from '@settlewright/geometry';
 import { describe, expect, it } from 'vitest';
-import { nameMove, readOutMove } from './move-words.ts';
+import { nameMove, nameMoves, readOutMove } from './move-words.ts';
 
 const STYLE: LengthStyle = { system: 'feet-inches', roundTo: 8 };
 const from = { xMm: 100, zMm: 100, turnDeg: 0 };
@@ -20,5 +20,11 @@ describe('a piece that is dragged', () => {
     expect(nameMove('T1', from, { ...from, turnDeg: 90 }, STYLE)).toBe('T1 turned');
     expect(nameMove('T1', from, { ...from, xMm: 100.5 }, STYLE)).toBe('T1 moved');
     expect(nameMove('T1', from, from, STYLE)).toBeUndefined();
+  });
+
+  it('counts the pieces that go together', () => {
+    expect(nameMoves(3, from, { ...from, xMm: 188.9 }, STYLE)).toBe('Move 3 pieces 3½″');
+    expect(nameMoves(3, from, { ...from, xMm: 100.5 }, STYLE)).toBe('Move 3 pieces');
+    expect(nameMoves(3, from, from, STYLE)).toBeUndefined();
   });
 });

@@ -10,6 +10,14 @@ export function nameMove(mark: string, from: Place, to: Place, style: LengthStyl
   return byMm > 1e-6 ? `${mark} moved` : undefined;
 }
 
+/** "Move 3 pieces 3½″"; undefined where they stand as before. */
+export function nameMoves(count: number, from: Place, to: Place, style: LengthStyle): string | undefined {
+  const byMm = Math.hypot(to.xMm - from.xMm, to.zMm - from.zMm);
+  if (byMm <= 1e-6) return undefined;
+  const by = byMm >= lengthStep(style) / 2 ? ` ${formatLength(byMm, style)}` : '';
+  return `Move ${count} pieces${by}`;
+}
+
 /** What stands near the pointer meanwhile: "x 3½″, z −2″, end of B2". */
 export function readOutMove(
   from: Place,

@@ -43,6 +43,7 @@ export function KeyPlan({ picture, address }: Props) {
   const tall = height + BOTTOM + 10;
   const x = (mm: number) => LEFT + (mm - minX) * scale;
   const z = (mm: number) => 8 + (mm - minZ) * scale;
+  const chosen = new Set(address.chosenIds);
   const selected = document.pieces.find((piece) => piece.id === address.pieceId);
   const frames = document.pieces.flatMap((piece) => placeFrames(piece, document));
   const dots = bodies.flatMap((body) => {
@@ -91,8 +92,8 @@ export function KeyPlan({ picture, address }: Props) {
                 .corners.map(([cx, cz]) => `${x(cx).toFixed(1)},${z(cz).toFixed(1)}`)
                 .join(' ')}
               fill={FILLS[piece.kind]}
-              stroke={piece.id === address.pieceId ? 'var(--color-ink)' : 'var(--color-pen)'}
-              strokeWidth={piece.id === address.pieceId ? 2.5 : 1}
+              stroke={chosen.has(piece.id) ? 'var(--color-ink)' : 'var(--color-pen)'}
+              strokeWidth={chosen.has(piece.id) ? 2.5 : 1}
               strokeDasharray={piece.kind === 'overhead' ? '4 3' : undefined}
             />
           ))}

@@ -33,6 +33,15 @@ const GROUPS: { title: string; keys: [keys: string, does: string][] }[] = [
       ['Alt while dragging', 'do not snap'],
     ],
   },
+  {
+    title: 'Several pieces',
+    keys: [
+      ['Shift or Ctrl and a press', 'add a piece to those chosen, or take it out'],
+      ['Shift Space, Shift Enter', 'the same, on a row of the list'],
+      ['Ctrl A', 'choose all, in the drawing or in the list'],
+      ['Arrows, comma, full stop, Delete', 'as for one, in the drawing'],
+    ],
+  },
 ];
 
 /** Every key the room knows, and the switch for those without Ctrl. */
@@ -40,7 +49,7 @@ export function KeysDialog({ open, onClose }: { open: boolean; onClose: () => vo
   const on = useSingleKeys((state) => state.on);
   return (
     <Dialog open={open} onClose={onClose} title="Keys" wide>
-      <div className="grid gap-x-10 gap-y-6 tablet:grid-cols-3">
+      <div className="grid gap-x-10 gap-y-6 phone:grid-cols-2">
         {GROUPS.map((group) => (
           <section key={group.title} className="ruled pt-2">
             <h3 className="mb-2 font-semibold">{group.title}</h3>

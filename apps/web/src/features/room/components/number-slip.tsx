@@ -10,7 +10,8 @@ import { BandLink } from './band-link.tsx';
 
 interface Props {
   id: string;
-  pieceId: string;
+  /** The one piece it is about; left out for a number of several. */
+  pieceId?: string;
   parameter: NumberParameter;
   reading: Reading;
   editing: boolean;
@@ -22,7 +23,7 @@ export function NumberSlip({ id, pieceId, parameter, reading, editing, onTake }:
   const { style } = useSurroundings();
   const document = useRoom((state) => state.document);
   const beyond =
-    'value' in reading
+    'value' in reading && pieceId !== undefined
       ? beyondRoom(parameter, reading.value, roomOf(document, pieceId, parameter.key), style)
       : undefined;
   const offered = (value: number): string => {
@@ -62,7 +63,9 @@ export function NumberSlip({ id, pieceId, parameter, reading, editing, onTake }:
         <p className="text-sm text-ink-2">
           Up and down keys move it{' '}
           <Measure text={showNumber({ ...parameter, key: 'step' }, style, stepOf(parameter, style))} />.{' '}
-          <WhoMinds pieceId={pieceId} parameter={parameter} value={reading.value} />
+          {pieceId !== undefined && (
+            <WhoMinds pieceId={pieceId} parameter={parameter} value={reading.value} />
+          )}
         </p>
       </div>
     );

@@ -20,10 +20,12 @@ interface Props {
   piece: Piece;
   document: SetDocument;
   actions: PieceActions;
+  /** Chooses several pieces, the first of which stays; left out where nothing can be changed. */
+  onChoose?: (pieceIds: readonly string[]) => void;
 }
 
 /** What the row of the selected piece opens: who sits there, and what can be done. */
-export function PieceDetails({ piece, document, actions }: Props) {
+export function PieceDetails({ piece, document, actions, onChoose }: Props) {
   const { cast, canEdit, style } = useSurroundings();
   const [open, setOpen] = useState<'numbers' | 'places' | null>(null);
   const frames = placeFrames(piece, document);
@@ -56,7 +58,7 @@ export function PieceDetails({ piece, document, actions }: Props) {
             name={`More of ${piece.mark}, menu`}
             button="More"
             buttonClassName="link min-h-6"
-            entries={moreEntries(piece, document, actions, style)}
+            entries={moreEntries(piece, document, actions, style, onChoose)}
           />
         )}
       </p>
@@ -76,13 +78,6 @@ export function PieceDetails({ piece, document, actions }: Props) {
     </div>
   );
 }
-
-const LINES = [
-  { edge: 'back', words: 'at the back' },
-  { edge: 'front', words: 'at the front' },
-  { edge: 'left', words: 'on the left' },
-  { edge: 'right', words: 'on the right' },
-] as const;
 
 /** The nearest length of whole boards, for a piece that is built of them and is not that long already. */
 function boardEntries(piece: Piece, document: SetDocument, actions: PieceActions, style: LengthStyle) {
@@ -104,7 +99,13 @@ function boardEntries(piece: Piece, document: SetDocument, actions: PieceActions
   ];
 }
 
-function moreEntries(piece: Piece, document: SetDocument, actions: PieceActions, style: LengthStyle) {
+function moreEntries(
+  piece: Piece,
+  document: SetDocument,
+  actions: PieceActions,
+  style: LengthStyle,
+  onChoose: Props['onChoose'],
+) {
   const like = document.pieces.filter((other) => other.kind === piece.kind).map((other) => other.id);
   const ids = [piece.id, ...like.filter((id) => id !== piece.id)];
   return [
@@ -112,12 +113,13 @@ function moreEntries(piece: Piece, document: SetDocument, actions: PieceActions,
     { id: 'left', words: 'Turn 15° left', disabled: piece.locked, onPress: () => actions.turn(piece, 15) },
     { id: 'right', words: 'Turn 15° right', disabled: piece.locked, onPress: () => actions.turn(piece, -15) },
     ...boardEntries(piece, document, actions, style),
-    ...LINES.map(({ edge, words }) => ({
-      id: `align-${edge}`,
-      words: `Line up all of its kind ${words}`,
+    {
+      id: 'kind',
+      words: 'Choose all of its kind',
+      detail: 'to line them up',
       disabled: ids.length < 2,
-      onPress: () => actions.align(ids, edge),
-    })),
+      onPress: () => onChoose?.(ids),
+    },
     {
       id: 'lock',
       words: piece.locked ? 'Unlock its place' : 'Lock its place',

@@ -1,10 +1,11 @@
 import { formatLength, type Piece, type SetDocument } from '@settlewright/geometry';
-import { useMemo, type ReactNode } from 'react';
+import { useMemo, type KeyboardEvent, type MouseEvent, type ReactNode } from 'react';
 import { classNames } from '@/components/class-names.ts';
 import { MarkTag, timberOf } from '@/components/mark-tag.tsx';
 import { Measure } from '@/components/measure.tsx';
 import { Menu } from '@/components/menu.tsx';
 import { RuleHeading } from '@/components/rule-heading.tsx';
+import { adds, type Choosing } from '../hooks/use-choosing.ts';
 import { KIND_WORDS, type PieceActions } from '../hooks/use-piece-actions.ts';
 import { useSurroundings } from '../room-context.tsx';
 import { PieceDetails } from './piece-details.tsx';
@@ -21,12 +22,14 @@ interface Props {
   selectedPieceId: string | undefined;
   onSelect: (pieceId: string | undefined) => void;
   actions: PieceActions;
+  /** Left out where only one piece can be looked at. */
+  choosing?: Choosing;
   /** Filled by the page: the order that a piece's cushions are in. */
   aboutPiece?: (piece: Piece) => ReactNode;
 }
 
 /** The schedule of pieces: mark, name, length; the selected one opens. */
-export function PiecesPanel({ document, selectedPieceId, onSelect, actions, aboutPiece }: Props) {
+export function PiecesPanel({ document, selectedPieceId, onSelect, actions, choosing, aboutPiece }: Props) {
   const { canEdit, style } = useSurroundings();
   const entries = useMemo(
     () =>
@@ -37,6 +40,26 @@ export function PiecesPanel({ document, selectedPieceId, onSelect, actions, abou
       })),
     [actions],
   );
+  const several = (choosing?.pieces.length ?? 0) > 1;
+
+  function press(piece: Piece, event: MouseEvent) {
+    if (choosing && (choosing.several || adds(event))) choosing.toggle(piece.id);
+    else onSelect(!several && piece.id === selectedPieceId ? undefined : piece.id);
+  }
+
+  /** Space or Enter with Shift adds a piece, as a press with Shift does; Ctrl A chooses all. */
+  function keys(event: KeyboardEvent) {
+    if (!choosing || !(event.target instanceof HTMLElement)) return;
+    const mark = event.target.closest('[data-piece]')?.getAttribute('data-piece');
+    const piece = document.pieces.find((one) => one.mark === mark);
+    if (!piece) return;
+    if (event.key === 'a' && (event.ctrlKey || event.metaKey)) choosing.chooseAll();
+    else if ((event.key === ' ' || event.key === 'Enter') && adds(event)) choosing.toggle(piece.id);
+    else if (event.key === 'Escape' && several) choosing.choose([]);
+    else return;
+    event.preventDefault();
+  }
+
   return (
     <section aria-labelledby="pieces-heading">
       <RuleHeading
@@ -56,37 +79,41 @@ export function PiecesPanel({ document, selectedPieceId, onSelect, actions, abou
         Pieces
       </RuleHeading>
       {document.pieces.length === 0 && <p className="text-sm text-ink-2">None yet.</p>}
-      <ul className="border-t-[1.25px] border-ink">
+      <ul className="border-t-[1.25px] border-ink" onKeyDown={keys}>
         {document.pieces.map((piece) => {
+          const chosen = several ? choosing?.pieces.includes(piece) === true : piece.id === selectedPieceId;
           const selected = piece.id === selectedPieceId;
           return (
             <li
               key={piece.id}
-              className={classNames('border-b', selected ? 'border-b-[1.5px] border-ink' : 'border-rule')}
+              className={classNames('border-b', chosen ? 'border-b-[1.5px] border-ink' : 'border-rule')}
             >
               <button
                 type="button"
                 aria-current={selected || undefined}
+                aria-pressed={choosing ? chosen : undefined}
                 data-piece={piece.mark}
-                onClick={() => onSelect(selected ? undefined : piece.id)}
+                onClick={(event) => press(piece, event)}
                 className="quick flex min-h-9 w-full items-center gap-3 py-1 text-left hover:bg-sunk"
               >
-                <MarkTag mark={piece.mark} timber={timberOf(piece.kind)} selected={selected} />
+                <MarkTag mark={piece.mark} timber={timberOf(piece.kind)} selected={chosen} />
                 <span
-                  className={classNames(
-                    'min-w-0 flex-1 truncate text-[0.94rem]',
-                    selected && 'font-semibold',
-                  )}
+                  className={classNames('min-w-0 flex-1 truncate text-[0.94rem]', chosen && 'font-semibold')}
                 >
                   {piece.name || KIND_WORDS[piece.kind]}
                 </span>
-                <span className={classNames('pr-1 text-sm', selected && 'font-semibold')}>
+                <span className={classNames('pr-1 text-sm', chosen && 'font-semibold')}>
                   <Measure text={formatLength(lengthOf(piece), { ...style, feet: true })} />
                 </span>
               </button>
-              {selected && (
+              {selected && !several && (
                 <div className="pb-2.5 pl-1">
-                  <PieceDetails piece={piece} document={document} actions={actions} />
+                  <PieceDetails
+                    piece={piece}
+                    document={document}
+                    actions={actions}
+                    onChoose={choosing?.choose}
+                  />
                   {aboutPiece?.(piece)}
                 </div>
               )}

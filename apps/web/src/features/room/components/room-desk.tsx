@@ -5,12 +5,15 @@ import { Button } from '@/components/button.tsx';
 import { Notice } from '@/components/notice.tsx';
 import type { SetInfo } from '../api.ts';
 import { useRoomAddress } from '../hooks/use-address.ts';
+import { useChoosing } from '../hooks/use-choosing.ts';
+import { useGroupActions } from '../hooks/use-group-actions.ts';
 import { usePieceActions } from '../hooks/use-piece-actions.ts';
 import { useRoomCells } from '../hooks/use-room-cells.ts';
 import { useSavedCell } from '../hooks/use-saved-cell.ts';
 import { useShortcuts, type ShortcutActions } from '../hooks/use-shortcuts.ts';
 import { RoomContext, useAutosave, usePicture, useSurroundings } from '../room-context.tsx';
 import { useRoomStore, useUndo } from '../store.ts';
+import { ChosenPieces } from './chosen-pieces.tsx';
 import { ConflictScreen } from './conflict-screen.tsx';
 import { EmptySet } from './empty-set.tsx';
 import { IssueRevision } from './issue-revision.tsx';
@@ -38,6 +41,8 @@ export function RoomDesk({ lastRevision, foot, aboutPiece }: Props) {
   const store = useRoomStore();
   const address = useRoomAddress();
   const actions = usePieceActions(address.select);
+  const choosing = useChoosing(picture.document, address);
+  const groupActions = useGroupActions(address.choose);
   const { undoStep, redoStep } = useUndo();
   const [helpOpen, setHelpOpen] = useState(false);
   const { clientView } = address;
@@ -94,10 +99,13 @@ export function RoomDesk({ lastRevision, foot, aboutPiece }: Props) {
                   piece={piece}
                   address={address}
                   actions={actions}
+                  several={mayChange ? { choosing, actions: groupActions } : undefined}
                   onOpenCell={openCell}
                 />
                 {!address.fitOpen &&
-                  (piece ? (
+                  (mayChange && choosing.pieces.length > 1 ? (
+                    <ChosenPieces document={document} choosing={choosing} actions={groupActions} />
+                  ) : piece ? (
                     <div className="pb-4">
                       <SpecSentence key={piece.id} piece={piece} />
                     </div>
@@ -118,6 +126,7 @@ export function RoomDesk({ lastRevision, foot, aboutPiece }: Props) {
               selectedPieceId={address.pieceId}
               onSelect={address.select}
               actions={actions}
+              choosing={mayChange ? choosing : undefined}
               aboutPiece={aboutPiece}
             />
             {!empty && <KeyPlan picture={picture} address={address} />}

@@ -2,6 +2,9 @@ import { tapeLines, type Piece } from '@settlewright/geometry';
 import { lazy, Suspense, useId, useMemo, useRef, useState, type KeyboardEvent } from 'react';
 import { LoadingLine } from '@/components/loading.tsx';
 import { useTheme } from '@/lib/theme.ts';
+import { joinWords } from '../choosing-words.ts';
+import type { Choosing } from '../hooks/use-choosing.ts';
+import type { GroupActions } from '../hooks/use-group-actions.ts';
 import type { PieceActions } from '../hooks/use-piece-actions.ts';
 import { useSceneHand } from '../hooks/use-scene-hand.ts';
 import { useView } from '../hooks/use-view.ts';
@@ -25,6 +28,8 @@ const FADE = {
   maskComposite: 'intersect',
 };
 
+const NOTHING: readonly string[] = [];
+
 const SceneCanvas = lazy(() => import('../scene/scene-canvas.tsx'));
 
 interface Props {
@@ -32,11 +37,13 @@ interface Props {
   piece: Piece | undefined;
   address: RoomAddress;
   actions: PieceActions;
+  /** Left out where only one piece can be looked at. */
+  several?: { choosing: Choosing; actions: GroupActions };
   onOpenCell: (cellId: string) => void;
 }
 
 /** The drawing, what stands over it and what can be done to it. */
-export function SceneStage({ picture, piece, address, actions, onOpenCell }: Props) {
+export function SceneStage({ picture, piece, address, actions, several, onOpenCell }: Props) {
   const { style, canEdit, maker } = useSurroundings();
   const theme = useTheme((state) => state.choice);
   const lit = useRoom((state) => state.litCellId);
@@ -54,17 +61,20 @@ export function SceneStage({ picture, piece, address, actions, onOpenCell }: Pro
     letter,
     selectedPieceId: address.pieceId,
     onSelect: address.select,
+    choosing: several?.choosing,
     readOut,
   });
 
+  const group = several && several.choosing.pieces.length > 1 ? several : undefined;
+  const chosenIds = clientView ? NOTHING : address.chosenIds;
+  // Several pieces have too many sizes to show: the tapes are those of one.
+  const tapedId = group ? undefined : address.pieceId;
   const tapes = useMemo(
-    () => tapeLines(picture.document, picture.sheet, address.pieceId, picture.bodies),
-    [picture, address.pieceId],
+    () => tapeLines(picture.document, picture.sheet, tapedId, picture.bodies),
+    [picture, tapedId],
   );
   const shown =
-    showTapes && !clientView
-      ? tapesAtRest(tapes, picture.sheet, address.pieceId, lit, view.narrow ? 2 : 5)
-      : [];
+    showTapes && !clientView ? tapesAtRest(tapes, picture.sheet, tapedId, lit, view.narrow ? 2 : 5) : [];
   const bodies = showBodies ? picture.bodies.filter((body) => isBehind(body.crownMm, view.cut)) : [];
 
   function keys(event: KeyboardEvent<HTMLDivElement>) {
@@ -72,6 +82,11 @@ export function SceneStage({ picture, piece, address, actions, onOpenCell }: Pro
     if (event.key === 'Escape') {
       hand.cancel();
       if (!hand.isDragging()) address.select(undefined);
+      return;
+    }
+    if (event.key === 'a' && (event.ctrlKey || event.metaKey) && several) {
+      several.choosing.chooseAll();
+      event.preventDefault();
       return;
     }
     if (event.ctrlKey || event.metaKey || !piece || !canEdit) return;
@@ -83,7 +98,14 @@ export function SceneStage({ picture, piece, address, actions, onOpenCell }: Pro
       ArrowDown: [0, size],
     };
     const move = moves[event.key];
-    if (move && !piece.locked) actions.nudge(piece, ...move);
+    if (group) {
+      const { pieces } = group.choosing;
+      if (move) group.actions.nudge(pieces, ...move);
+      else if (event.key === ',') group.actions.turn(pieces, 15);
+      else if (event.key === '.') group.actions.turn(pieces, -15);
+      else if (event.key === 'Delete' || event.key === 'Backspace') group.actions.remove(pieces);
+      else return;
+    } else if (move && !piece.locked) actions.nudge(piece, ...move);
     else if (event.key === ',' && !piece.locked) actions.turn(piece, 15);
     else if (event.key === '.' && !piece.locked) actions.turn(piece, -15);
     else if (event.key === 'Delete' || event.key === 'Backspace') actions.remove(piece);
@@ -104,7 +126,13 @@ export function SceneStage({ picture, piece, address, actions, onOpenCell }: Pro
         ref={sheet}
         role="application"
         aria-roledescription="drawing"
-        aria-label={`${VIEW_TITLES[letter]}. ${piece ? `${piece.mark} selected.` : 'Nothing selected.'}`}
+        aria-label={`${VIEW_TITLES[letter]}. ${
+          group
+            ? `${joinWords(group.choosing.pieces.map(({ mark }) => mark))} chosen.`
+            : piece
+              ? `${piece.mark} selected.`
+              : 'Nothing selected.'
+        }`}
         aria-describedby={about}
         tabIndex={0}
         data-scene={letter}
@@ -126,7 +154,7 @@ export function SceneStage({ picture, piece, address, actions, onOpenCell }: Pro
                 controller={view.controller}
                 letter={letter}
                 cut={view.cut}
-                selectedPieceId={clientView ? undefined : address.pieceId}
+                chosenIds={chosenIds}
                 showBodies={showBodies}
                 theme={theme}
                 report={({ calls, triangles }) => {
@@ -144,7 +172,7 @@ export function SceneStage({ picture, piece, address, actions, onOpenCell }: Pro
           tapes={shown}
           style={style}
           litCellId={lit}
-          selectedPieceId={address.pieceId}
+          selectedPieceId={tapedId}
           onSelectPiece={address.select}
           onOpenCell={onOpenCell}
         />
@@ -157,6 +185,11 @@ export function SceneStage({ picture, piece, address, actions, onOpenCell }: Pro
         {isToScale(letter) && <ScaleBar controller={view.controller} style={style} />}
       </div>
       <div className="flex flex-wrap items-center justify-end gap-x-5 gap-y-1 py-1.5 text-sm text-ink-2">
+        {several && (
+          <Toggle on={several.choosing.several} onChange={several.choosing.setSeveral}>
+            Choose several
+          </Toggle>
+        )}
         <Toggle on={showBodies} onChange={setShowBodies}>
           Bodies
         </Toggle>

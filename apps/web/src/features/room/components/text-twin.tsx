@@ -22,7 +22,8 @@ export function TextTwin({ id, picture, tapes, onOpenCell }: Props) {
           ? 'The set is empty.'
           : `Shows ${document.pieces.map((piece) => `${piece.mark} ${piece.name}`).join(', ')}.`}{' '}
         {sayPlaces(document, bodies, style)} Arrow keys move the selected piece, comma and full stop turn it,
-        Delete removes it. Sizes are listed below.
+        Delete removes it; with Shift a press adds to what is chosen, and Ctrl A chooses all. Sizes are listed
+        below.
       </p>
       {tapes.length > 0 && (
         <ul aria-label="Tapes of the drawing">

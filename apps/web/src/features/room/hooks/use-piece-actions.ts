@@ -1,6 +1,5 @@
 import {
   addPiece,
-  alignPieces,
   duplicatePiece,
   formatLength,
   lengthStep,
@@ -13,11 +12,10 @@ import {
   type SitterRef,
 } from '@settlewright/geometry';
 import { useMemo } from 'react';
-import { announce } from '@/lib/announce.ts';
 import { useSurroundings } from '../room-context.tsx';
 import { shortName, sitterName } from '../sitters.ts';
 import { useRoomStore } from '../store.ts';
-import { changedVerdicts } from '../verdict-words.ts';
+import { useTakeStep } from './use-take-step.ts';
 
 export const KIND_WORDS: Record<PieceKind, string> = {
   bench: 'bench',
@@ -28,8 +26,6 @@ export const KIND_WORDS: Record<PieceKind, string> = {
   overhead: 'beam or soffit',
 };
 
-export type Edge = Parameters<typeof alignPieces>[2];
-
 export interface PieceActions {
   add: (kind: PieceKind) => void;
   remove: (piece: Piece) => void;
@@ -38,7 +34,6 @@ export interface PieceActions {
   nudge: (piece: Piece, stepsX: number, stepsZ: number) => void;
   turn: (piece: Piece, byDeg: number) => void;
   place: (piece: Piece, at: Partial<Piece['at']>) => void;
-  align: (ids: readonly string[], edge: Edge) => void;
   setFlag: (piece: Piece, flag: 'locked' | 'accessible', on: boolean) => void;
   rename: (piece: Piece, name: string) => void;
   seat: (piece: Piece, place: number, sitter: SitterRef | null) => void;
@@ -48,16 +43,10 @@ export interface PieceActions {
 /** Everything that can be done to a piece, each as one named step. */
 export function usePieceActions(select: (pieceId: string | undefined) => void): PieceActions {
   const store = useRoomStore();
-  const { style, cast, maker, engine } = useSurroundings();
+  const { style, cast } = useSurroundings();
+  const take = useTakeStep();
 
   return useMemo(() => {
-    function take(next: SetDocument, step: string) {
-      const { document, commit } = store.getState();
-      if (next === document) return;
-      commit(next, step);
-      const verdicts = changedVerdicts(maker.check(document), maker.check(next), engine.ruleBook);
-      announce(`${[step, ...verdicts].join('. ')}.`);
-    }
     const now = () => store.getState().document;
     const change = (piece: Piece, patch: Partial<Piece>): SetDocument => ({
       ...now(),
@@ -91,7 +80,6 @@ export function usePieceActions(select: (pieceId: string | undefined) => void): 
         take(movePiece(now(), piece.id, { ...piece.at, turnDeg }), `${piece.mark} turned ${byDeg}°`);
       },
       place: (piece, at) => take(movePiece(now(), piece.id, { ...piece.at, ...at }), `${piece.mark} moved`),
-      align: (ids, edge) => take(alignPieces(now(), [...ids], edge), `Aligned ${ids.length} pieces`),
       setFlag: (piece, flag, on) => {
         const words = {
           locked: ['unlocked', 'locked'],
@@ -108,5 +96,5 @@ export function usePieceActions(select: (pieceId: string | undefined) => void): 
       },
       replace: take,
     };
-  }, [store, style, cast, maker, engine, select]);
+  }, [store, style, cast, take, select]);
 }

@@ -1,8 +1,15 @@
-import { movePiece, snapPiece, type Piece, type SetDocument, type Snapped } from '@settlewright/geometry';
+import {
+  movePiece,
+  movePieces,
+  snapPiece,
+  type Piece,
+  type SetDocument,
+  type Snapped,
+} from '@settlewright/geometry';
 import { useEffect, useRef, type PointerEvent, type RefObject } from 'react';
 import { announce } from '@/lib/announce.ts';
 import type { RoomPicture } from '../picture.ts';
-import { nameMove, readOutMove } from '../move-words.ts';
+import { nameMove, nameMoves, readOutMove } from '../move-words.ts';
 import { useSurroundings } from '../room-context.tsx';
 import { onLevel, pieceUnder } from '../scene/pick.ts';
 import { turn } from '../scene/vectors.ts';
@@ -10,6 +17,7 @@ import { pixelsPerMm, rayThrough } from '../scene/view-frame.ts';
 import type { ViewLetter } from '../scene/views.ts';
 import { visibleParts } from '../scene/visible-parts.ts';
 import { useRoomStore } from '../store.ts';
+import { adds, type Choosing } from './use-choosing.ts';
 import type { View } from './use-view.ts';
 
 const DRAG_STARTS_PX = 5;
@@ -23,11 +31,28 @@ interface Drag {
   moving: boolean;
   /** The piece in the hand; without one the sheet itself is moved. */
   piece: Piece | undefined;
+  /** What goes with it; itself alone unless several are chosen. */
+  pieces: readonly Piece[];
+  /** What was pressed, if anything was. */
+  pressedId: string | undefined;
+  /** The press adds to what is chosen instead of choosing anew. */
+  adding: boolean;
   /** True when nothing was hit: a click there lets go of the selection. */
   onPaper: boolean;
+  /** The press lies on one of several chosen pieces: a click alone then chooses that one. */
+  onGroup: boolean;
   base: SetDocument;
   floor: { xMm: number; zMm: number } | undefined;
   snapped?: Snapped;
+}
+
+/** Snaps the piece in the hand to what does not go with it; several keep their turns. */
+function snapTogether(base: SetDocument, piece: Piece, pieces: readonly Piece[], to: Piece['at']): Snapped {
+  if (pieces.length < 2) return snapPiece(base, piece.id, to);
+  const along = new Set(pieces.map(({ id }) => id));
+  const rest = base.pieces.filter(({ id }) => id === piece.id || !along.has(id));
+  const snapped = snapPiece({ ...base, pieces: rest }, piece.id, to);
+  return Math.abs(snapped.at.turnDeg - to.turnDeg) < 1e-9 ? snapped : { at: to };
 }
 
 /** Clicking, dragging pieces over the floor, and moving the sheet: kept out of React until let go. */
@@ -37,10 +62,11 @@ export function useSceneHand(options: {
   letter: ViewLetter;
   selectedPieceId: string | undefined;
   onSelect: (pieceId: string | undefined) => void;
+  choosing: Choosing | undefined;
   /** Stands near the pointer while a piece is dragged. */
   readOut: RefObject<HTMLDivElement | null>;
 }) {
-  const { picture, view, letter, selectedPieceId, onSelect, readOut } = options;
+  const { picture, view, letter, selectedPieceId, onSelect, choosing, readOut } = options;
   const store = useRoomStore();
   const { canEdit, style } = useSurroundings();
   const drag = useRef<Drag | null>(null);
@@ -60,9 +86,9 @@ export function useSceneHand(options: {
   }
 
   /** A finger that scrolls must not carry furniture along: it moves only what was selected before. */
-  function mayMove(piece: Piece, pointerType: string): boolean {
+  function mayMove(piece: Piece, pointerType: string, chosen: boolean): boolean {
     if (!canEdit || piece.locked || piece.kind === 'bulkhead') return false;
-    return pointerType !== 'touch' || piece.id === selectedPieceId;
+    return pointerType !== 'touch' || chosen || piece.id === selectedPieceId;
   }
 
   function down(event: PointerEvent<HTMLElement>) {
@@ -73,6 +99,10 @@ export function useSceneHand(options: {
     const parts = visibleParts(picture.document, picture.parts, letter);
     const pieceId = pieceUnder(parts, ray);
     const piece = picture.document.pieces.find((candidate) => candidate.id === pieceId);
+    const adding = choosing !== undefined && (choosing.several || adds(event));
+    const group = choosing && choosing.pieces.length > 1 ? choosing.pieces : [];
+    const onGroup = group.some((one) => one.id === pieceId);
+    const movable = piece && (onGroup || !adding) && mayMove(piece, event.pointerType, onGroup);
     drag.current = {
       pointerId: event.pointerId,
       startX: x,
@@ -80,13 +110,17 @@ export function useSceneHand(options: {
       lastX: x,
       lastY: y,
       moving: false,
-      piece: piece && mayMove(piece, event.pointerType) ? piece : undefined,
+      piece: movable ? piece : undefined,
+      pieces: onGroup ? group : piece ? [piece] : [],
+      pressedId: pieceId,
+      adding,
+      onGroup,
       onPaper: pieceId === undefined,
       base: store.getState().document,
       floor: onLevel(ray, 0),
     };
     event.currentTarget.setPointerCapture(event.pointerId);
-    if (pieceId !== undefined) onSelect(pieceId);
+    if (pieceId !== undefined && !adding && !onGroup) onSelect(pieceId);
   }
 
   /** Where the piece would stand: over the floor where it is seen from above, else along the sheet. */
@@ -112,10 +146,18 @@ export function useSceneHand(options: {
     if (hand.piece) {
       const by = shift(hand, x, y);
       if (!by) return;
-      const { piece, base } = hand;
+      const { piece, pieces, base } = hand;
       const to = { xMm: piece.at.xMm + by.x, zMm: piece.at.zMm + by.z, turnDeg: piece.at.turnDeg };
-      const snapped: Snapped = event.altKey ? { at: to } : snapPiece(base, piece.id, to);
-      wanted.current = movePiece(base, piece.id, snapped.at);
+      const snapped: Snapped = event.altKey ? { at: to } : snapTogether(base, piece, pieces, to);
+      const way = { xMm: snapped.at.xMm - piece.at.xMm, zMm: snapped.at.zMm - piece.at.zMm };
+      wanted.current =
+        pieces.length > 1
+          ? movePieces(
+              base,
+              pieces.map(({ id }) => id),
+              way,
+            )
+          : movePiece(base, piece.id, snapped.at);
       hand.snapped = snapped;
       showReadOut(readOutMove(piece.at, snapped.at, snapped.snappedTo, style), x, y);
       cancelAnimationFrame(request.current);
@@ -151,16 +193,27 @@ export function useSceneHand(options: {
     drag.current = null;
     hideReadOut();
     if (hand?.piece && hand.moving && hand.snapped && wanted.current) {
-      const { piece, snapped } = hand;
-      const step = nameMove(piece.mark, piece.at, snapped.at, style);
+      const { piece, pieces, snapped } = hand;
+      const step =
+        pieces.length > 1
+          ? nameMoves(pieces.length, piece.at, snapped.at, style)
+          : nameMove(piece.mark, piece.at, snapped.at, style);
       if (step === undefined) store.getState().showPreview(null);
       else {
         store.getState().commit(wanted.current, step);
         announce(snapped.snappedTo ? `${step}, ${snapped.snappedTo}` : step);
       }
     }
-    if (hand?.onPaper && !hand.moving) onSelect(undefined);
+    if (hand && !hand.moving) letGo(hand);
     wanted.current = null;
+  }
+
+  /** A press without a way: chooses one, adds one, or lets go of all. */
+  function letGo({ pressedId, adding, onGroup, onPaper }: Drag) {
+    if (adding) {
+      if (pressedId !== undefined) choosing?.toggle(pressedId);
+    } else if (onPaper) onSelect(undefined);
+    else if (onGroup) onSelect(pressedId);
   }
 
   function cancel() {

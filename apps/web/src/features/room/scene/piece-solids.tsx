@@ -15,16 +15,16 @@ export function useDispose(geometries: Record<string, BufferGeometry>) {
 interface Props {
   picture: RoomPicture;
   letter: ViewLetter;
-  selectedPieceId: string | undefined;
+  chosenIds: readonly string[];
   materials: SceneMaterials;
 }
 
-/** All pieces in a handful of draw calls; the selected one is drawn apart for its outline. */
-export function PieceSolids({ picture, letter, selectedPieceId, materials }: Props) {
+/** All pieces in a handful of draw calls; the chosen ones are drawn apart for their outline. */
+export function PieceSolids({ picture, letter, chosenIds, materials }: Props) {
   const made = useMemo(() => {
     const parts = visibleParts(picture.document, picture.parts, letter);
-    const others = mergeParts(parts.filter((part) => part.pieceId !== selectedPieceId));
-    const chosen = mergeParts(parts.filter((part) => part.pieceId === selectedPieceId));
+    const others = mergeParts(parts.filter((part) => !chosenIds.includes(part.pieceId)));
+    const chosen = mergeParts(parts.filter((part) => chosenIds.includes(part.pieceId)));
     return {
       others: surfaceOf(others.positions, others.normals, others.materials),
       chosen: surfaceOf(chosen.positions, chosen.normals, chosen.materials),
@@ -38,7 +38,7 @@ export function PieceSolids({ picture, letter, selectedPieceId, materials }: Pro
         [...others.roundNormals, ...chosen.roundNormals],
       ),
     };
-  }, [picture, letter, selectedPieceId]);
+  }, [picture, letter, chosenIds]);
   useDispose(made);
 
   return (

@@ -19,7 +19,7 @@ export interface SceneProps {
   controller: ViewController;
   letter: ViewLetter;
   cut: Cut | undefined;
-  selectedPieceId: string | undefined;
+  chosenIds: readonly string[];
   showBodies: boolean;
   /** Raised when the theme changes. */
   theme: string;
@@ -56,7 +56,7 @@ function aim(camera: OrthographicCamera, frame: ViewFrame, aspect: number) {
   camera.projectionMatrixInverse.copy(camera.projectionMatrix).invert();
 }
 
-function Stage({ picture, controller, letter, cut, selectedPieceId, showBodies, theme, report }: SceneProps) {
+function Stage({ picture, controller, letter, cut, chosenIds, showBodies, theme, report }: SceneProps) {
   const camera = useMemo(() => new OrthographicCamera(), []);
   const shared = useMemo(() => createSharedUniforms(), []);
   const materials = useMemo(() => createMaterials(shared), [shared]);
@@ -90,7 +90,7 @@ function Stage({ picture, controller, letter, cut, selectedPieceId, showBodies, 
   }, [size, shared, invalidate]);
 
   useEffect(() => controller.subscribe(() => invalidate()), [controller, invalidate]);
-  useEffect(() => invalidate(), [picture, letter, selectedPieceId, showBodies, invalidate]);
+  useEffect(() => invalidate(), [picture, letter, chosenIds, showBodies, invalidate]);
   useEffect(
     () => () => Object.values(materials).forEach((item) => 'dispose' in item && item.dispose()),
     [materials],
@@ -114,12 +114,7 @@ function Stage({ picture, controller, letter, cut, selectedPieceId, showBodies, 
   return (
     <group scale={METRES}>
       <Ground picture={picture} letter={letter} materials={materials} />
-      <PieceSolids
-        picture={picture}
-        letter={letter}
-        selectedPieceId={selectedPieceId}
-        materials={materials}
-      />
+      <PieceSolids picture={picture} letter={letter} chosenIds={chosenIds} materials={materials} />
       {showBodies && (
         <BodyFigures picture={picture} palette={palette} shared={shared} materials={materials} />
       )}
