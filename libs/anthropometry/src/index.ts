@@ -21,3 +21,15 @@ export { summarise, type SurveySummary } from './populations/summarise.ts';
 export { completeSummary, type WholeSummary } from './populations/complete-summary.ts';
 export { fillGaps, type Filled } from './populations/fill-gaps.ts';
 export { isLogged, momentsOf, workedOf, type Moments, type Worked } from './populations/worked.ts';
+export type { Draws, Population, PopulationKind } from './populations/population.ts';
+export { mixOf, mixPopulations } from './populations/mix.ts';
+export { civilians2015 } from './populations/civilian.ts';
+export { nationalPopulations } from './populations/nations.ts';
+export { ownPopulation, soldiers2012, type OwnSurvey } from './populations/survey-population.ts';
+export {
+  childSizeMarks,
+  readChildren,
+  type Children,
+  type ChildSizeMark,
+} from './populations/children-file.ts';
+export { childrenOfMark } from './populations/children.ts';
