@@ -35,10 +35,13 @@ const MOST_PLACES = 60;
 export function decimals(x: number, places: number): number {
   const up = x.toFixed(places);
   const [whole = '', rest = ''] = x.toFixed(MOST_PLACES).split('.');
-  if (!/^50*$/.test(rest.slice(places))) return Number(up);
+  if (!/^50*$/.test(rest.slice(places))) return plainZero(Number(up));
   const cut = places === 0 ? whole : `${whole}.${rest.slice(0, places)}`;
-  return Number(/[02468]$/.test(cut) ? cut : up);
+  return plainZero(Number(/[02468]$/.test(cut) ? cut : up));
 }
+
+/** JSON knows no zero with a sign. */
+const plainZero = (x: number): number => (x === 0 ? 0 : x);
 
 /** Rounds to significant digits. */
 export const digits = (x: number, count: number): number => Number(x.toPrecision(count));
