@@ -10,6 +10,7 @@ export * from './checks/situation.ts';
 export * from './checks/fit-sheet.ts';
 export * from './checks/rule-book.ts';
 export * from './checks/confidence.ts';
+export * from './checks/rule-conflicts.ts';
 export * from './checks/seat-sink.ts';
 export { checkSet, type CheckInput } from './checks/check-set.ts';
 export type { CheckSettings } from './checks/piece-check.ts';

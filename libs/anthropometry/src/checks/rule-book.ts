@@ -65,6 +65,29 @@ export interface Practice {
   source: string;
 }
 
+/** One side of two rules that pull against each other. */
+export interface ConflictSide {
+  /** The public's and the person's form of one demand stand together; none where no rule asks for it. */
+  rules: string[];
+  /** What this side is for, in one plain sentence. */
+  purpose: string;
+}
+
+/** Rules that pull against each other: meeting one makes it harder to meet the other. */
+export interface RuleConflict {
+  id: string;
+  /** When it comes up, in one plain sentence. */
+  when: string;
+  sides: [ConflictSide, ConflictSide];
+  /** One sentence with `{name}` for each number. */
+  note: string;
+  /** Names as in a rule; shares are bare and end in Share. */
+  numbers: Record<string, number>;
+  sources: Rule['sources'];
+  /** At odds wherever this rule's value lies between these two, whatever the verdicts are. */
+  atValue?: { rule: string; lowerMm: number; upperMm: number };
+}
+
 /** All rules of one version, in the order of the sheet. */
 export interface RuleBook {
   version: string;
@@ -74,6 +97,7 @@ export interface RuleBook {
   /** How far past a line still counts as on it. */
   boundaryTolerance: Record<RuleUnit, number>;
   practices: Practice[];
+  conflicts: RuleConflict[];
   rules: Rule[];
   /** @throws RangeError when the book has no such rule */
   rule(id: string): Rule;
@@ -114,6 +138,18 @@ const ruleSchema = z.object({
   }),
 });
 
+const sideSchema = z.object({ rules: z.array(z.string()), purpose: z.string().min(1) });
+
+const conflictSchema = z.object({
+  id: z.string().min(1),
+  when: z.string().min(1),
+  sides: z.tuple([sideSchema, sideSchema]),
+  note: z.string().min(1),
+  numbers: z.record(z.string(), z.number()),
+  sources: z.array(sourceSchema).min(1),
+  atValue: z.object({ rule: z.string(), lowerMm: z.number(), upperMm: z.number() }).optional(),
+});
+
 const bookSchema = z.object({
   version: z.string().min(1),
   confidence: z.number().min(CONFIDENCE_LIMITS.lowest).max(CONFIDENCE_LIMITS.highest),
@@ -134,6 +170,7 @@ const bookSchema = z.object({
       source: z.string().min(1),
     }),
   ),
+  conflicts: z.array(conflictSchema),
   rules: z.array(ruleSchema).min(1),
 });
 
@@ -150,16 +187,23 @@ export function loadRuleBook(json: unknown): RuleBook {
     const [issue] = parsed.error.issues;
     throw new Error(`Fit rules: ${issue?.path.join('.') ?? ''}: ${issue?.message ?? 'not readable'}`);
   }
-  const { version, confidence, confidenceSource, boundaryTolerance, practices, rules } = parsed.data;
+  const { version, confidence, confidenceSource, boundaryTolerance, practices, conflicts, rules } =
+    parsed.data;
   const byId = new Map(rules.map((rule) => [rule.id, rule]));
   if (byId.size !== rules.length)
     throw new Error('Fit rules: two rules carry the same id; accepted: one each');
+  const unknown = conflicts
+    .flatMap(({ sides }) => sides.flatMap((side) => side.rules))
+    .find((id) => !byId.has(id));
+  if (unknown !== undefined)
+    throw new Error(`Fit rules: a conflict names ${unknown}; accepted: a rule of the book`);
   return {
     version,
     confidence,
     confidenceSource,
     boundaryTolerance,
     practices,
+    conflicts,
     rules,
     rule(id) {
       const rule = byId.get(id);

@@ -1,0 +1,120 @@
+import type { FitCell, FitSheet } from './fit-sheet.ts';
+import type { RuleBook, RuleConflict } from './rule-book.ts';
+
+/** What one side of a conflict says in a sheet: the worst cell of each of its rules. */
+export interface SideSaid {
+  purpose: string;
+  cells: FitCell[];
+}
+
+/** Two sides that are at odds in a sheet. */
+export interface ConflictFound {
+  conflict: RuleConflict;
+  /** Marks of the pieces that both sides are about. */
+  marks: string[];
+  sides: [SideSaid, SideSaid];
+}
+
+/** Worst first. */
+const RANK = { wontFit: 0, outside: 0, tight: 1, fits: 2, inside: 2 } as const;
+
+/**
+ * Rules that pull against each other in this sheet: both sides are asked of a common piece, both can be told, and
+ * at least one of them is not met, so that mending it takes from the other. A conflict that names a range of values is
+ * at odds wherever the value lies in it.
+ *
+ * @param sheet - a fit sheet
+ * @param ruleBook - the rules it was made with
+ * @returns conflicts in the order of the rule book, each with the worst that either side says
+ */
+export function conflictsIn(sheet: FitSheet, ruleBook: RuleBook): ConflictFound[] {
+  const cells = [...sheet.rows.flatMap((row) => row.cells), ...sheet.publicRow.cells, ...sheet.piecesAndWays];
+  return ruleBook.conflicts.flatMap((conflict): ConflictFound[] => {
+    const [one, other] = conflict.sides.map(({ rules }) =>
+      cells.filter((cell) => rules.includes(cell.ruleId) && metOf(cell) !== undefined),
+    ) as [FitCell[], FitCell[]];
+    const pairs = conflict.sides[1].rules.length === 0 ? alone(conflict, one) : pairsOf(conflict, one, other);
+    if (pairs.length === 0) return [];
+    return [
+      {
+        conflict,
+        marks: marksOf(pairs),
+        sides: [
+          { purpose: conflict.sides[0].purpose, cells: worstOfEach(pairs.map(([cell]) => cell)) },
+          { purpose: conflict.sides[1].purpose, cells: worstOfEach(pairs.flatMap(([, cell]) => cell ?? [])) },
+        ],
+      },
+    ];
+  });
+}
+
+type Pair = readonly [FitCell, FitCell | undefined];
+
+const alone = (conflict: RuleConflict, cells: readonly FitCell[]): Pair[] =>
+  cells.filter((cell) => isInRange(conflict, cell)).map((cell) => [cell, undefined]);
+
+function pairsOf(conflict: RuleConflict, ones: readonly FitCell[], others: readonly FitCell[]): Pair[] {
+  return ones.flatMap((one) =>
+    others
+      .filter((other) => one.pieceIds.some((id) => other.pieceIds.includes(id)))
+      .filter((other) =>
+        conflict.atValue
+          ? isInRange(conflict, one) || isInRange(conflict, other)
+          : metOf(one) === false || metOf(other) === false,
+      )
+      .map((other): Pair => [one, other]),
+  );
+}
+
+function isInRange({ atValue }: RuleConflict, { ruleId, outcome }: FitCell): boolean {
+  if (!atValue || atValue.rule !== ruleId || outcome.kind !== 'verdict') return false;
+  return outcome.value >= atValue.lowerMm - 0.1 && outcome.value <= atValue.upperMm + 0.1;
+}
+
+/** Whether a cell is met; undefined where that cannot be told. */
+function metOf({ outcome }: FitCell): boolean | undefined {
+  if (outcome.kind === 'clause') return outcome.inside;
+  if (outcome.kind !== 'verdict' || outcome.verdict === 'notKnown') return undefined;
+  return outcome.verdict === 'fits';
+}
+
+function rankOf({ outcome }: FitCell): number {
+  if (outcome.kind === 'clause') return RANK[outcome.inside ? 'inside' : 'outside'];
+  return outcome.kind === 'verdict' && outcome.verdict !== 'notKnown' ? RANK[outcome.verdict] : RANK.fits;
+}
+
+function worstOfEach(cells: readonly FitCell[]): FitCell[] {
+  const worst = new Map<string, FitCell>();
+  for (const cell of cells) {
+    const known = worst.get(cell.ruleId);
+    if (known === undefined || rankOf(cell) < rankOf(known)) worst.set(cell.ruleId, cell);
+  }
+  return [...worst.values()];
+}
+
+function marksOf(pairs: readonly Pair[]): string[] {
+  const marks = pairs.flatMap(([one, other]) =>
+    one.marks.filter((_, i) => !other || other.pieceIds.includes(one.pieceIds[i] ?? '')),
+  );
+  return [...new Set(marks)];
+}
+
+const MM_PER_INCH = 25.4;
+
+/**
+ * The note of a conflict with its numbers written in.
+ *
+ * @param conflict - from the rule book
+ * @param sayLength - a length in millimetres, in the reader's units
+ * @returns one sentence; shares are told in a hundred
+ */
+export function conflictNote(
+  { note, numbers }: RuleConflict,
+  sayLength: (millimetres: number) => string,
+): string {
+  return note.replace(/\{(\w+)\}/g, (_, name: string) => {
+    const value = numbers[name] ?? NaN;
+    if (name.endsWith('Share')) return `${Math.round(value * 100)} in 100`;
+    return sayLength(name.endsWith('In') ? value * MM_PER_INCH : value);
+  });
+}
