@@ -113,16 +113,17 @@ describe('revisions and fit sheets', () => {
     await expect(test.dataSource.query(sql)).rejects.toThrow(/issued revision cannot be/);
   });
 
-  it('lets even the erasure change nothing but the sheet', async () => {
+  it('lets even the erasure change nothing but the sheet and what people typed', async () => {
     await issue().expect(201);
     const erasing = (sql: string) =>
       test.dataSource.transaction(async (manager) => {
         await manager.query("SELECT set_config('settlewright.erasing', 'on', true)");
         await manager.query(`${sql} WHERE set_id = $1`, [place.setId]);
       });
-    await expect(erasing("UPDATE set_revisions SET note = 'other'")).rejects.toThrow(/cannot be changed/);
+    await expect(erasing("UPDATE set_revisions SET letter = 'Z'")).rejects.toThrow(/cannot be changed/);
+    await expect(erasing("UPDATE set_revisions SET counts = '{}'")).rejects.toThrow(/cannot be changed/);
     await expect(erasing('DELETE FROM set_revisions')).rejects.toThrow(/cannot be deleted/);
-    await erasing("UPDATE set_revisions SET fit_sheet = '{}'");
+    await erasing("UPDATE set_revisions SET fit_sheet = '{}', note = 'other'");
     const after = test.dataSource.query("UPDATE set_revisions SET fit_sheet = '[]'");
     await expect(after).rejects.toThrow(/cannot be changed/);
   });

@@ -1,8 +1,9 @@
 import { Injectable } from '@nestjs/common';
 import { InjectRepository } from '@nestjs/typeorm';
-import { type EntityManager, In, IsNull, type Repository } from 'typeorm';
+import { type EntityManager, In, IsNull, Not, type Repository } from 'typeorm';
 import { AuditService } from '../audit/audit.service';
 import type { MemberInfo } from '../common/access.decorator';
+import type { KeptRow } from '../common/kept-text';
 import type { Page, PageQuery } from '../common/page.dto';
 import { Problem } from '../common/problem';
 import { readPage } from '../common/read-page';
@@ -147,6 +148,28 @@ export class CastService {
     return (manager ?? this.people.manager).findBy(CastMember, { productionId, id: In(ids) });
   }
 
+  /** What people typed about the others of a production: parts, notes, who measured them. */
+  async textsOfOthers(manager: EntityManager, productionId: string, castId: string): Promise<KeptRow[]> {
+    const others = await manager.findBy(CastMember, {
+      productionId,
+      id: Not(castId),
+      removedAt: IsNull(),
+    });
+    return others.map(({ id, name, role, notes, measured }) => ({
+      texts: [
+        { where: `${name}, part`, text: role },
+        { where: `${name}, notes`, text: notes },
+        ...Object.values(measured).map(({ takenBy = '' }) => ({ where: `${name}, taken by`, text: takenBy })),
+      ],
+      rewrite: (change) =>
+        manager.update(
+          CastMember,
+          { id },
+          { role: change(role), notes: change(notes), measured: takenByChanged(measured, change) },
+        ),
+    }));
+  }
+
   /** Part of the caller's transaction. Answers the name that was, and the one that stands in its stead. */
   async removePersonalData(
     manager: EntityManager,
@@ -224,4 +247,12 @@ function measuredOf(sent: Record<string, unknown> | undefined | null): TapeMeasu
   const read = readMeasured(sent ?? {});
   if (!read.ok) throw Problem.invalid(read.fields);
   return read.value;
+}
+
+function takenByChanged(measured: TapeMeasures, change: (text: string) => string): TapeMeasures {
+  const entries = Object.entries(measured).map(([key, measure]) => [
+    key,
+    measure.takenBy === undefined ? measure : { ...measure, takenBy: change(measure.takenBy) },
+  ]);
+  return Object.fromEntries(entries) as TapeMeasures;
 }

@@ -12,6 +12,7 @@ import { LinkService } from './link.service';
 import { OrderCorrespondence } from './order-correspondence.service';
 import { OrderPaper } from './order-paper.service';
 import { OrderProgress } from './order-progress.service';
+import { OrderTexts } from './order-texts.service';
 import { OrderViews } from './order-views.service';
 import { OrdersController } from './orders.controller';
 import { OrdersService } from './orders.service';
@@ -34,7 +35,8 @@ import { OrdersService } from './orders.service';
     OrderViews,
     OrderPaper,
     LinkService,
+    OrderTexts,
   ],
-  exports: [OrdersService, OrderCorrespondence, LinkService],
+  exports: [OrdersService, OrderCorrespondence, LinkService, OrderTexts],
 })
 export class CushionOrdersModule {}

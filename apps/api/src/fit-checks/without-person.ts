@@ -1,4 +1,5 @@
 import type { FitCell, FitSheet, Outcome, VerdictOutcome } from '@settlewright/anthropometry';
+import { PersonName } from '../common/person-name';
 
 /** Rules about a bench, a table or a way that read nobody's body. All others lose their values. */
 const READS_NO_BODY: ReadonlySet<string> = new Set([
@@ -71,10 +72,9 @@ function emptiedOutcome(outcome: Outcome): Outcome {
 
 /** Replaces the name wherever a text of the sheet says it as whole words. */
 function renamed<T>(value: T, name: string, newName: string): T {
-  const words = name.replace(/[.*+?^${}()|[\]\\]/g, '\\$&');
-  const said = new RegExp(`(?<![\\p{L}\\p{N}])${words}(?![\\p{L}\\p{N}])`, 'gu');
+  const said = new PersonName(name);
   const walk = (part: unknown): unknown => {
-    if (typeof part === 'string') return part.replace(said, () => newName);
+    if (typeof part === 'string') return said.replacedIn(part, newName);
     if (Array.isArray(part)) return part.map(walk);
     if (typeof part !== 'object' || part === null) return part;
     return Object.fromEntries(Object.entries(part).map(([key, entry]) => [key, walk(entry)]));

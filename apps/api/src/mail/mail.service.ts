@@ -1,9 +1,13 @@
 import { randomUUID } from 'node:crypto';
 import { Injectable } from '@nestjs/common';
 import { type EntityManager, In } from 'typeorm';
+import type { KeptRow } from '../common/kept-text';
 import { InjectSettings, type Settings } from '../config/settings';
 import { OutboxAttachment } from './entities/outbox-attachment.entity';
-import { OutboxMail } from './entities/outbox-mail.entity';
+import { type MailState, OutboxMail } from './entities/outbox-mail.entity';
+
+/** Somebody may have read these. */
+const WENT_OUT: readonly MailState[] = ['sending', 'sent', 'perhaps-sent'];
 
 export interface MailToSend {
   to: string;
@@ -61,6 +65,41 @@ export class MailService {
       where: { relatedId, kind: In([...kinds]) },
       order: { queuedAt: 'DESC', id: 'DESC' },
     });
+  }
+
+  /** What people typed into mails about something. The text of a mail that went out is no longer kept. */
+  async textsAbout(manager: EntityManager, relatedId: string, where: string): Promise<KeptRow[]> {
+    const mails = await manager.find(OutboxMail, { where: { relatedId }, order: { queuedAt: 'ASC' } });
+    return mails.map(({ id, state, subject, text, html }) => ({
+      texts: [subject, text ?? '', html ?? ''].map((written) => ({
+        where: state === 'sent' ? `${where}, letter` : `${where}, letter not sent yet`,
+        text: written,
+        alreadySent: WENT_OUT.includes(state),
+      })),
+      rewrite: (change) =>
+        manager.update(
+          OutboxMail,
+          { id },
+          {
+            subject: change(subject),
+            text: text === null ? null : change(text),
+            html: html === null ? null : change(html),
+          },
+        ),
+    }));
+  }
+
+  /** Mails about something that still hold a paper, as they have not gone out for certain. */
+  async holdingPaper(manager: EntityManager, relatedId: string): Promise<string[]> {
+    const held = await manager.find(OutboxAttachment, {
+      where: { mail: { relatedId } },
+      select: { id: true, mailId: true },
+    });
+    return held.map(({ mailId }) => mailId);
+  }
+
+  async replacePaper(manager: EntityManager, mailIds: readonly string[], content: Buffer): Promise<void> {
+    await manager.update(OutboxAttachment, { mailId: In([...mailIds]) }, { content });
   }
 
   private newMessageId(): string {

@@ -15,6 +15,7 @@ import { DraftsService } from './drafts.service';
 import { type ApproveRevisionDto, type IssueRevisionDto, RevisionDto } from './dto/revision.dto';
 import { RevisionApproval } from './entities/revision-approval.entity';
 import { SetRevision } from './entities/set-revision.entity';
+import { whileErasing } from './erasing';
 import { revisionLetter } from './letters';
 import { SeatedPeople } from './seated-people.service';
 import { SetAccess } from './set-access';
@@ -172,7 +173,6 @@ export class RevisionsService {
     person: { id: string; name: string },
     newName: string,
   ): Promise<void> {
-    await manager.query("SELECT set_config('settlewright.erasing', 'on', true)");
     const ids = await manager
       .createQueryBuilder(SetRevision, 'revision')
       .select('revision.id', 'id')
@@ -182,9 +182,9 @@ export class RevisionsService {
     for (const { id } of ids) {
       const revision = await manager.findOneByOrFail(SetRevision, { id });
       const fitSheet = withoutPerson(revision.fitSheet, person, newName);
-      if (fitSheet !== revision.fitSheet) await manager.update(SetRevision, { id }, { fitSheet });
+      if (fitSheet === revision.fitSheet) continue;
+      await whileErasing(manager, () => manager.update(SetRevision, { id }, { fitSheet }));
     }
-    await manager.query("SELECT set_config('settlewright.erasing', 'off', true)");
   }
 
   private listed(): SelectQueryBuilder<SetRevision> {

@@ -23,6 +23,7 @@ import { RevisionsController } from './revisions.controller';
 import { RevisionsService } from './revisions.service';
 import { SeatedPeople } from './seated-people.service';
 import { SetAccess } from './set-access';
+import { SetTexts } from './set-texts.service';
 import { SetsController } from './sets.controller';
 import { SetsService } from './sets.service';
 
@@ -52,7 +53,8 @@ import { SetsService } from './sets.service';
     FitSheetFilesService,
     NotesService,
     BuiltPartsService,
+    SetTexts,
   ],
-  exports: [DraftsService, SetsService, RevisionsService],
+  exports: [DraftsService, SetsService, RevisionsService, SetTexts],
 })
 export class SetsModule {}

@@ -56,6 +56,7 @@ export const EXPECTED_ACCESS: Record<string, AccessRule> = {
   [`PATCH ${P}/cast/{castId}`]: MAKERS,
   [`DELETE ${P}/cast/{castId}`]: MAKERS,
   [`GET ${P}/cast/{castId}/export`]: MAKERS,
+  [`GET ${P}/cast/{castId}/named`]: MAKERS,
   [`GET ${P}/cast.csv`]: MAKERS,
   [`POST ${P}/cast/import/preview`]: MAKERS,
   [`POST ${P}/cast/import`]: MAKERS,

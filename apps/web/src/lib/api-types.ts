@@ -1045,6 +1045,22 @@ export interface paths {
         patch?: never;
         trace?: never;
     };
+    "/api/workshops/{workshopId}/productions/{productionId}/cast/{castId}/named": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        get: operations["CastErasure_named"];
+        put?: never;
+        post?: never;
+        delete?: never;
+        options?: never;
+        head?: never;
+        patch?: never;
+        trace?: never;
+    };
     "/api/workshops/{workshopId}/productions/{productionId}/duplicate": {
         parameters: {
             query?: never;
@@ -2381,6 +2397,26 @@ export interface components {
              * @description `sentAt` of the order that was read; refused when another was sent meanwhile
              */
             sentAt?: string;
+        };
+        NamedPlaceDto: {
+            /** @description where the text stands, in words */
+            where: string;
+            before: string;
+            /** @description the name, or the part of it, as it was written */
+            name: string;
+            after: string;
+            /** @description it went to the upholsterer or came from there */
+            alreadySent: boolean;
+            /** @description how often the same words stand there, as in earlier drafts */
+            copies: number;
+        };
+        NamedPlacesDto: {
+            /** @description the whole name; taken out when the person is erased; the first 200 */
+            places: components["schemas"]["NamedPlaceDto"][];
+            placeCount: number;
+            /** @description a part of the name by itself; stays, as it may be somebody else’s; the first 200 */
+            parts: components["schemas"]["NamedPlaceDto"][];
+            partCount: number;
         };
         ProblemBody: {
             type: string;
@@ -3823,7 +3859,7 @@ export interface operations {
         };
         requestBody?: never;
         responses: {
-            /** @description the person is gone from cast, drafts and issued sheets */
+            /** @description the person is gone from cast, drafts, issued sheets and what people typed */
             204: {
                 headers: {
                     [name: string]: unknown;
@@ -5413,6 +5449,38 @@ export interface operations {
                 };
                 content: {
                     "application/json": components["schemas"]["PublicOrderDto"];
+                };
+            };
+            /** @description what went wrong (RFC 9457) */
+            default: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemBody"];
+                };
+            };
+        };
+    };
+    CastErasure_named: {
+        parameters: {
+            query?: never;
+            header?: never;
+            path: {
+                productionId: string;
+                castId: string;
+            };
+            cookie?: never;
+        };
+        requestBody?: never;
+        responses: {
+            /** @description where the name of this person was typed */
+            200: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["NamedPlacesDto"];
                 };
             };
             /** @description what went wrong (RFC 9457) */

@@ -39,6 +39,9 @@ export type CastMember = Schema['CastNameDto'] &
     measured?: Partial<Record<TapeMeasureKey, TapeReading>>;
   };
 
+/** A text that somebody typed with a person's name in it. */
+export type NamedPlace = Schema['NamedPlaceDto'];
+export type NamedPlaces = Schema['NamedPlacesDto'];
 export type ImportRow = Schema['CastImportRowDto'];
 export type ImportPreview = Schema['CastImportPreviewDto'];
 export type ImportResult = Schema['CastImportDto'];

@@ -2,16 +2,20 @@ import { Injectable } from '@nestjs/common';
 import { DataSource } from 'typeorm';
 import { AuditService } from '../../audit/audit.service';
 import type { MemberInfo } from '../../common/access.decorator';
+import { OrderTexts } from '../../cushion-orders/order-texts.service';
 import { RevisionsService } from '../../sets/revisions.service';
 import { CastService } from '../cast.service';
+import { ErasedNames } from './erased-names.service';
 
-/** Takes a person out of everything that is kept: the cast, the drafts and the sheets of issued revisions. */
+/** Takes a person out of everything that is kept: cast, sheets of issued revisions, and what people typed. */
 @Injectable()
 export class CastErasureService {
   constructor(
     private readonly dataSource: DataSource,
     private readonly cast: CastService,
     private readonly revisions: RevisionsService,
+    private readonly names: ErasedNames,
+    private readonly orders: OrderTexts,
     private readonly audit: AuditService,
   ) {}
 
@@ -20,13 +24,16 @@ export class CastErasureService {
     await this.dataSource.transaction(async (manager) => {
       const { name, newName } = await this.cast.removePersonalData(manager, productionId, castId);
       await this.revisions.removePerson(manager, productionId, { id: castId, name }, newName);
+      const found = await this.names.remove(manager, member, productionId, { id: castId, name });
       await this.audit.record(manager, {
         workshopId: member.workshopId,
         userId: member.userId,
         action: 'cast.erased',
         subjectType: 'cast-member',
         subjectId: castId,
+        detail: { ...found },
       });
     });
+    await this.orders.redrawWaitingPapers(productionId);
   }
 }

@@ -4,6 +4,7 @@ import { SetsAndCast1796141100000 } from './1796141100000-sets-and-cast';
 import { CushionOrders1796142000000 } from './1796142000000-cushion-orders';
 import { UpholstererOfMessages1796144400000 } from './1796144400000-upholsterer-of-messages';
 import { ConfidenceOfAWorkshop1796157600000 } from './1796157600000-confidence-of-a-workshop';
+import { ErasedNames1796158800000 } from './1796158800000-erased-names';
 
 /** In the order in which they run. What is merged is never changed. */
 export const MIGRATIONS: (new () => MigrationInterface)[] = [
@@ -12,4 +13,5 @@ export const MIGRATIONS: (new () => MigrationInterface)[] = [
   CushionOrders1796142000000,
   UpholstererOfMessages1796144400000,
   ConfidenceOfAWorkshop1796157600000,
+  ErasedNames1796158800000,
 ];

@@ -16,7 +16,7 @@ import type { Counts } from './set-draft.entity';
 
 /**
  * A frozen issue of a set with the fit sheet of that day. The database refuses every change but one:
- * taking an erased person out of the sheet.
+ * taking an erased person out of the sheet and out of what people typed.
  */
 @Entity('set_revisions')
 @Unique(['setId', 'letter'])

@@ -1,7 +1,14 @@
 import { useMutation, useQuery, useQueryClient } from '@tanstack/react-query';
 import type { TapeMeasureKey } from '@settlewright/anthropometry';
 import { api } from '@/lib/api-client.ts';
-import type { CastMember, ImportPreview, ImportResult, Page, TapeReading } from '@/lib/contract.ts';
+import type {
+  CastMember,
+  ImportPreview,
+  ImportResult,
+  NamedPlaces,
+  Page,
+  TapeReading,
+} from '@/lib/contract.ts';
 import { productionKey, productionPath } from '@/lib/production.ts';
 
 /** What is sent to add or change a person; null clears a value. */
@@ -55,6 +62,16 @@ export const useSaveCastMember = (place: CastPlace) =>
 
 export const useErase = (place: CastPlace) =>
   useChange(place, (id: string) => api.delete(`${path(place)}/${id}`));
+
+/** Where the person's name was typed; looked up anew each time somebody is about to be erased. */
+export const useNamedPlaces = (place: CastPlace, id: string | undefined) =>
+  useQuery({
+    queryKey: [...castKey(place), id, 'named'],
+    queryFn: ({ signal }) => api.get<NamedPlaces>(`${path(place)}/${id}/named`, { signal }),
+    enabled: id !== undefined,
+    staleTime: 0,
+    gcTime: 0,
+  });
 
 export const usePreviewImport = (place: CastPlace) =>
   useMutation({

@@ -2,7 +2,8 @@ import { toast } from 'sonner';
 import { FormDialog } from '@/components/dialog.tsx';
 import type { CastMember } from '@/lib/contract.ts';
 import { sayProblem } from '@/lib/problem.ts';
-import { type CastPlace, useErase } from '../api.ts';
+import { type CastPlace, useErase, useNamedPlaces } from '../api.ts';
+import { NamedPlaces } from './named-places.tsx';
 
 interface EraseDialogProps {
   place: CastPlace;
@@ -12,6 +13,7 @@ interface EraseDialogProps {
 
 export function EraseDialog({ place, person, onClose }: EraseDialogProps) {
   const erase = useErase(place);
+  const found = useNamedPlaces(place, person?.id);
   return (
     <FormDialog
       open={person !== null}
@@ -21,7 +23,7 @@ export function EraseDialog({ place, person, onClose }: EraseDialogProps) {
         <>
           <p>
             Name, measures and notes go for good, from drafts, issued revisions, fit sheets and stored papers
-            too.
+            too, and the name from what people typed.
           </p>
           <p className="mt-2">
             Where they sat stands “removed sitter”; the verdicts stay. This cannot be undone. Export them
@@ -30,8 +32,8 @@ export function EraseDialog({ place, person, onClose }: EraseDialogProps) {
         </>
       }
       verb="Erase"
-      busyWords="Erasing"
-      busy={erase.isPending}
+      busyWords={erase.isPending ? 'Erasing' : 'Looking'}
+      busy={erase.isPending || (person !== null && found.isPending)}
       problem={erase.isError ? sayProblem(erase.error) : null}
       onSubmit={(event) => {
         event.preventDefault();
@@ -44,7 +46,7 @@ export function EraseDialog({ place, person, onClose }: EraseDialogProps) {
         });
       }}
     >
-      {null}
+      <NamedPlaces found={found} />
     </FormDialog>
   );
 }

@@ -151,4 +151,59 @@ describe('PeoplePage', () => {
     await userEvent.click(screen.getByRole('button', { name: 'Add 1 person' }));
     await waitFor(() => expect(imported).toEqual({ csv: 'name,height,hat' }));
   });
+
+  describe('erasing', () => {
+    const at = (where: string, name: string, alreadySent = false) => ({
+      where,
+      before: 'ask ',
+      name,
+      after: ' first',
+      alreadySent,
+      copies: 1,
+    });
+    async function open(answer: () => Response) {
+      signInAs('owner');
+      const erased: unknown[] = [];
+      server.use(
+        http.get(castPath, () => HttpResponse.json(page([HETTY]))),
+        http.get(`${castPath}/:castId/named`, answer),
+        http.delete(`${castPath}/:castId`, ({ params }) => {
+          erased.push(params.castId);
+          return new HttpResponse(null, { status: 204 });
+        }),
+      );
+      show();
+      await userEvent.click(await screen.findByRole('button', { name: 'More for Hetty Vance' }));
+      await userEvent.click(await screen.findByRole('menuitem', { name: 'Erase' }));
+      return { dialog: await screen.findByRole('dialog'), erased };
+    }
+
+    it('shows first where the name stands, what was sent already and what is left', async () => {
+      const { dialog, erased } = await open(() =>
+        HttpResponse.json({
+          places: [at('Carriage, room note', 'HETTY VANCE'), at('Order 1, letter', 'Hetty Vance', true)],
+          placeCount: 2,
+          parts: [at('Carriage, draft, note on B1', 'Vance')],
+          partCount: 1,
+        }),
+      );
+      const kept = await within(dialog).findByRole('region', { name: /takes the place of the name/ });
+      expect(within(kept).getByText('HETTY VANCE').tagName).toBe('MARK');
+      expect(within(kept).queryByText(/letter/)).toBeNull();
+      const sent = within(dialog).getByRole('region', { name: 'Already sent, cannot be called back' });
+      expect(within(sent).getByText('Order 1, letter')).toBeVisible();
+      await userEvent.click(within(dialog).getByText(/Parts of the name in 1 place/));
+      expect(within(dialog).getByText('Carriage, draft, note on B1')).toBeVisible();
+      expect(erased).toEqual([]);
+      await userEvent.click(within(dialog).getByRole('button', { name: 'Erase' }));
+      await waitFor(() => expect(erased).toEqual([HETTY.id]));
+    });
+
+    it('may still be done when the places cannot be listed', async () => {
+      const { dialog, erased } = await open(() => HttpResponse.json({}, { status: 500 }));
+      expect(await within(dialog).findByText(/could not be listed/)).toBeVisible();
+      await userEvent.click(within(dialog).getByRole('button', { name: 'Erase' }));
+      await waitFor(() => expect(erased).toEqual([HETTY.id]));
+    });
+  });
 });

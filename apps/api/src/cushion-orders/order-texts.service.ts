@@ -1,0 +1,93 @@
+import { Injectable } from '@nestjs/common';
+import { InjectDataSource } from '@nestjs/typeorm';
+import { DataSource, type EntityManager } from 'typeorm';
+import type { KeptRow, KeptText } from '../common/kept-text';
+import { MailService } from '../mail/mail.service';
+import { CushionOrder } from './entities/cushion-order.entity';
+import { OrderEvent } from './entities/order-event.entity';
+import { OrderMessage } from './entities/order-message.entity';
+import { type OrderContent, type OrderSpec, SPEC_KEYS } from './order-content';
+import { OrderPaper } from './order-paper.service';
+
+type Change = (text: string) => string;
+
+/** What people typed into the orders of a production, and what was exchanged about them. */
+@Injectable()
+export class OrderTexts {
+  constructor(
+    @InjectDataSource() private readonly dataSource: DataSource,
+    private readonly mail: MailService,
+    private readonly paper: OrderPaper,
+  ) {}
+
+  async *of(manager: EntityManager, productionId: string): AsyncGenerator<KeptRow> {
+    const orders = await manager.find(CushionOrder, { where: { productionId }, order: { number: 'ASC' } });
+    for (const order of orders) {
+      const where = `Order ${order.number}`;
+      yield ofOrder(manager, order, where);
+      for (const { id, note } of await manager.findBy(OrderEvent, { orderId: order.id })) {
+        yield {
+          texts: [{ where: `${where}, what happened`, text: note }],
+          rewrite: (change) => manager.update(OrderEvent, { id }, { note: change(note) }),
+        };
+      }
+      for (const { id, side, text } of await manager.findBy(OrderMessage, { orderId: order.id })) {
+        const by = side === 'workshop' ? 'to' : 'from';
+        yield {
+          texts: [{ where: `${where}, letter ${by} the upholsterer`, text, alreadySent: true }],
+          rewrite: (change) => manager.update(OrderMessage, { id }, { text: change(text) }),
+        };
+      }
+      yield* await this.mail.textsAbout(manager, order.id, where);
+    }
+  }
+
+  /** Papers that wait in the outbox are drawn again; after the texts were changed for good. */
+  async redrawWaitingPapers(productionId: string): Promise<void> {
+    const { manager } = this.dataSource;
+    const orders = await manager.find(CushionOrder, {
+      where: { productionId },
+      relations: { set: true, upholsterer: true },
+    });
+    for (const order of orders) {
+      const holding = await this.mail.holdingPaper(manager, order.id);
+      if (holding.length === 0 || !order.sent) continue;
+      await this.mail.replacePaper(manager, holding, await this.paper.pack(order, order.sent));
+    }
+  }
+}
+
+function ofOrder(manager: EntityManager, order: CushionOrder, where: string): KeptRow {
+  const { id, sent } = order;
+  return {
+    texts: [
+      ...contentTexts(order, where, {}),
+      ...(sent ? contentTexts(sent, `${where}, as it was sent`, { alreadySent: true }) : []),
+    ],
+    rewrite: (change) =>
+      manager.update(
+        CushionOrder,
+        { id },
+        { ...changedWords(order, change), sent: sent && { ...sent, ...changedWords(sent, change) } },
+      ),
+  };
+}
+
+function contentTexts(
+  { title, spec }: OrderContent,
+  where: string,
+  sent: Pick<KeptText, 'alreadySent'>,
+): KeptText[] {
+  return [
+    { where: `${where}, title`, text: title, ...sent },
+    ...SPEC_KEYS.map((key) => ({ where: `${where}, ${key}`, text: spec[key], ...sent })),
+  ];
+}
+
+function changedWords({ title, spec }: OrderContent, change: Change): Pick<OrderContent, 'title' | 'spec'> {
+  const words = Object.fromEntries(SPEC_KEYS.map((key) => [key, change(spec[key])])) as Record<
+    keyof OrderSpec,
+    string
+  >;
+  return { title: change(title), spec: words };
+}

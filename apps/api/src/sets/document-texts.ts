@@ -1,0 +1,54 @@
+import type { Piece, SetDocument } from '@settlewright/geometry';
+
+/** The longest that the document's schema takes. */
+const MAX = { name: 80, note: 2000, grade: 60, difference: 1000 };
+
+type Change = (text: string, max: number, where: string) => string;
+
+/** The document with every text that people typed into it changed, each no longer than it may be. */
+export function withTexts(
+  document: SetDocument,
+  change: (text: string, where: string) => string,
+): SetDocument {
+  const fitted: Change = (text, max, where) => {
+    const changed = change(text, where);
+    return changed === text ? text : changed.slice(0, max).trim();
+  };
+  return {
+    ...document,
+    pieces: document.pieces.map((piece) => changedPiece(piece, fitted)),
+    knownDifferences: document.knownDifferences.map((one) => ({
+      ...one,
+      text: fitted(one.text, MAX.difference, 'known differences'),
+      ...(one.reason === undefined
+        ? {}
+        : { reason: fitted(one.reason, MAX.difference, 'known differences') }),
+    })),
+  };
+}
+
+function changedPiece(piece: Piece, change: Change): Piece {
+  const common = {
+    name: change(piece.name, MAX.name, `name of ${piece.mark}`),
+    note: change(piece.note, MAX.note, `note on ${piece.mark}`),
+  };
+  const foamOf = (cushion: Cushion): Cushion => ({
+    ...cushion,
+    foam: { ...cushion.foam, grade: change(cushion.foam.grade, MAX.grade, `foam of ${piece.mark}`) },
+  });
+  switch (piece.kind) {
+    case 'bench':
+      return {
+        ...piece,
+        ...common,
+        seatCushion: foamOf(piece.seatCushion),
+        backCushion: foamOf(piece.backCushion),
+      };
+    case 'loose-seat':
+      return { ...piece, ...common, seatCushion: foamOf(piece.seatCushion) };
+    default:
+      return { ...piece, ...common };
+  }
+}
+
+type Cushion = Extract<Piece, { kind: 'bench' }>['seatCushion'];
