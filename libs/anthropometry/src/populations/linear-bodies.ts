@@ -112,10 +112,16 @@ function writerOf(
     .map((key) => places.get(key) as number)
     .sort((a, b) => a - b);
   const values = new Float64Array(rows.length);
-  const asked = needed.map((place) => {
-    const row = rows[place] as BodyRow;
-    return { ...row, place, column: columns.get(row.key) };
-  });
+  const asked = needed.map((place) => rows[place] as BodyRow);
+  // One after another in one array, so that no person's product leaves it.
+  const factors = Float64Array.from(asked.flatMap((row) => [...row.factors]));
+  const lengths = Uint8Array.from(asked, (row) => row.factors.length);
+  const means = Float64Array.from(asked, ({ mean }) => mean);
+  const logged = Uint8Array.from(asked, (row) => (row.logged ? 1 : 0));
+  const lows = Float64Array.from(asked, ({ low }) => low);
+  const highs = Float64Array.from(asked, ({ high }) => high);
+  const askedPlaces = Uint8Array.from(needed);
+  const filled = asked.map(({ key }) => columns.get(key));
   const totals = summed.map((key) => ({
     column: columns.get(key) as Float32Array,
     parts: (sums.get(key) ?? []).map(([part, factor]) => ({ place: places.get(part) as number, factor })),
@@ -124,13 +130,17 @@ function writerOf(
     dimensions: Math.max(bend?.dimensions ?? 0, (needed.at(-1) ?? -1) + 1),
     write(normals, row) {
       bend?.change(normals);
-      for (const { place, mean, factors, logged, low, high, column } of asked) {
-        let value = mean;
-        for (let k = 0; k < factors.length; k += 1) value += (factors[k] as number) * (normals[k] as number);
-        if (logged) value = Math.exp(value);
-        if (value < low) value = low;
-        else if (value > high) value = high;
-        values[place] = value;
+      let at = 0;
+      for (let n = 0; n < means.length; n += 1) {
+        let value = means[n] as number;
+        const length = lengths[n] as number;
+        for (let k = 0; k < length; k += 1) value += (factors[at + k] as number) * (normals[k] as number);
+        at += length;
+        if (logged[n] === 1) value = Math.exp(value);
+        if (value < (lows[n] as number)) value = lows[n] as number;
+        else if (value > (highs[n] as number)) value = highs[n] as number;
+        values[askedPlaces[n] as number] = value;
+        const column = filled[n];
         if (column) column[row] = value;
       }
       for (const { column, parts: of } of totals) {
