@@ -11,6 +11,7 @@ import {
   seatAt,
   setNumber,
   toggleFit,
+  typeNumber,
   untilSaved,
 } from './room.ts';
 
@@ -123,6 +124,25 @@ describe('a set from the first account to the upholsterer’s answer', () => {
     await toggleFit(page);
     expect(await numberSaid(page, 'Seat height')).toContain('seventeen and one half inches');
     await page.getByText('Places 1 Cora, 2 Bruno').waitFor();
+  });
+
+  it('names the end of the room for a number, and lines two pieces up as one step', async () => {
+    await choose(page, 'S1');
+    await typeNumber(page, 'Length', '20 ft');
+    await page.getByText(/^Longest here is .*\(then it meets B1\)/).waitFor();
+    await page.keyboard.press('Tab');
+    await page.keyboard.press('Enter');
+    await page.getByRole('button', { name: /^Undo S1 length / }).click();
+
+    await choose(page, 'B1');
+    await page.locator('[data-piece="T1"]').click({ modifiers: ['Shift'] });
+    await say('heading', '2 pieces chosen').waitFor();
+    const lineUp = page.getByRole('group', { name: 'Line up' });
+    await lineUp.getByRole('button', { name: 'Left', exact: true }).click();
+    await page.getByRole('button', { name: /^Undo Line up 2 pieces on the left/ }).click();
+    await page.getByRole('button', { name: /^Redo Line up 2 pieces on the left/ }).waitFor();
+    await say('button', 'Let go of them').click();
+    await untilSaved(page);
   });
 
   it('issues revision A', async () => {
