@@ -34,3 +34,10 @@ export {
   type ChildSizeMark,
 } from './populations/children-file.ts';
 export { childrenOfMark } from './populations/children.ts';
+export { createStudy, type Study, type StudySetup, type Ticked } from './studies/study.ts';
+export { mergePartials, type FitTally, type Group, type PartialStudy, type Tally } from './studies/counts.ts';
+export type { Wear } from './studies/symbols.ts';
+export * from './studies/shares.ts';
+export type { Lost, LostTrait } from './studies/lost.ts';
+export { SURVEY_CAUTION, type Caution } from './studies/caution.ts';
+export * from './studies/curve.ts';

@@ -24,6 +24,41 @@ const LAST_STRAIN = 0.65;
 const POUNDS_PER_KG = 1 / 0.45359237;
 const NEWTONS_PER_POUND_FORCE = 4.4482216152605;
 
+/** Body weights that press a foam to its 25 % and to its 65 % line, kilograms. */
+export interface FoamLoads {
+  firstKg: number;
+  lastKg: number;
+}
+
+/**
+ * Weights at which a slab of foam reaches the two lines its maker states.
+ *
+ * @param foam - 25 % IFD in newtons and support factor, both > 0
+ * @source as `seatSinkMm`
+ */
+export function foamLoads({
+  ifd25N,
+  supportFactor,
+}: Pick<FoamSituation, 'ifd25N' | 'supportFactor'>): FoamLoads {
+  const first = ifd25N / NEWTONS_PER_POUND_FORCE / FOOT_SQUARE_INCHES;
+  const firstKg = (first * PATCH_SQUARE_INCHES) / (PATCH_SHARE * SEAT_SHARE * POUNDS_PER_KG);
+  return { firstKg, lastKg: supportFactor * firstKg };
+}
+
+/**
+ * Share of its thickness that a foam goes down.
+ *
+ * @param loads - of the foam
+ * @param weightKg - body weight; finite, >= 0
+ * @returns 0 to 0.65
+ * @source as `seatSinkMm`
+ */
+export function strainUnder({ firstKg, lastKg }: FoamLoads, weightKg: number): number {
+  if (weightKg > lastKg) return LAST_STRAIN;
+  if (weightKg <= firstKg) return (FIRST_STRAIN * weightKg) / firstKg;
+  return FIRST_STRAIN + ((LAST_STRAIN - FIRST_STRAIN) * (weightKg - firstKg)) / (lastKg - firstKg);
+}
+
 /**
  * How far a slab of new foam on a rigid deck goes down under a sitter. Trust it to about 30 %.
  *
@@ -34,14 +69,7 @@ const NEWTONS_PER_POUND_FORCE = 4.4482216152605;
  *   FAA AM 62-1 (1962) and a seat interface study; share and area of the patch are common practice, from memory
  */
 export function seatSinkMm(foam: FoamSituation, weightKg: number): SeatSink {
-  const pressure = (PATCH_SHARE * SEAT_SHARE * weightKg * POUNDS_PER_KG) / PATCH_SQUARE_INCHES;
-  const first = foam.ifd25N / NEWTONS_PER_POUND_FORCE / FOOT_SQUARE_INCHES;
-  const last = foam.supportFactor * first;
-  const bottomsOut = pressure > last;
-  const strain = bottomsOut
-    ? LAST_STRAIN
-    : pressure <= first
-      ? (FIRST_STRAIN * pressure) / first
-      : FIRST_STRAIN + ((LAST_STRAIN - FIRST_STRAIN) * (pressure - first)) / (last - first);
-  return { sinkMm: strain * foam.thicknessMm, strain, bottomsOut };
+  const loads = foamLoads(foam);
+  const strain = strainUnder(loads, weightKg);
+  return { sinkMm: strain * foam.thicknessMm, strain, bottomsOut: weightKg > loads.lastKg };
 }

@@ -1,0 +1,226 @@
+import type { MeasureKey } from '../measures/measures.ts';
+import { together, type CompiledCheck, type CompiledPlace, type Demand } from './compile.ts';
+import {
+  GROUPS,
+  tallyOf,
+  type CellCount,
+  type CheckCount,
+  type FitTally,
+  type Group,
+  type PartialStudy,
+} from './counts.ts';
+import type { Crowd } from './crowd.ts';
+import type { PeopleSet, PeopleSets } from './people-sets.ts';
+
+/** People of one sex and what is asked of them. */
+export interface GroupStudy {
+  crowd: Crowd;
+  sets: PeopleSets;
+  places: readonly CompiledPlace[];
+}
+
+export type GroupStudies = Record<Group, GroupStudy>;
+
+/** What counts for "all at once". */
+export interface Ticks {
+  rule: (ruleId: string) => boolean;
+  place: (placeId: string) => boolean;
+}
+
+type Demands = Record<Group, Pick<CompiledCheck, 'fits' | 'atLeastTight'>>;
+
+/** A rule at all ticked places. */
+interface Everywhere extends FitTally {
+  ruleId: string;
+  demands: Demands;
+  reads: readonly MeasureKey[];
+  twoSided: boolean;
+}
+
+const NOBODY_COUNTED = { fits: { women: 0, men: 0 }, atLeastTight: { women: 0, men: 0 } } as const;
+/** Who is lost is told by these, and by the first measures that the rule itself reads. */
+const TELLING: readonly MeasureKey[] = ['stature', 'weight_kg'];
+const OWN_MEASURES = 2;
+
+/** Counts ticked rules at all ticked places together. */
+export const countAll = (studies: GroupStudies, ticks: Ticks): FitTally =>
+  counted(studies, joined(studies, ticks));
+
+/**
+ * Counts of one set without the people behind them: what a curve needs.
+ *
+ * @param studies - people and questions by sex
+ * @param ticks - what counts
+ * @returns ticked rules at all ticked places, one by one and together
+ */
+export function countTicked(
+  studies: GroupStudies,
+  ticks: Ticks,
+): { all: FitTally; checks: (FitTally & { ruleId: string })[] } {
+  return {
+    all: countAll(studies, ticks),
+    checks: everywhere(studies, ticks).map(({ ruleId, fits, atLeastTight, unknown }) => ({
+      ruleId,
+      fits,
+      atLeastTight,
+      unknown,
+    })),
+  };
+}
+
+/**
+ * Counts everything that shares are made from.
+ *
+ * @param studies - people and questions by sex
+ * @param ticks - what counts for "all at once"
+ * @param block - number of the block of people
+ */
+export function countStudy(studies: GroupStudies, ticks: Ticks, block: number): PartialStudy {
+  const checks = everywhere(studies, ticks);
+  const told = new Set([...TELLING, ...checks.flatMap(({ reads }) => reads)]);
+  const known = [...told].filter((key) =>
+    GROUPS.every((group) => studies[group].crowd.people === 0 || studies[group].crowd.measure(key)),
+  );
+  return {
+    blocks: [block],
+    question: questionOf(studies, checks),
+    people: tallyOf((group) => studies[group].crowd.people),
+    cells: cellsOf(studies),
+    places: studies.women.places
+      .map(({ placeId }) => placeId)
+      .filter(ticks.place)
+      .map((placeId) => ({
+        placeId,
+        ...counted(studies, joined(studies, { ...ticks, place: (id) => id === placeId })),
+      })),
+    checks: checks.map((check, at) => checkCount(studies, check, checks.slice(at + 1), known)),
+    all: countAll(studies, ticks),
+    everyone: Object.fromEntries(
+      known.map((key) => [
+        key,
+        {
+          sum: tallyOf((group) => studies[group].sets.sums(key).sum),
+          squares: tallyOf((group) => studies[group].sets.sums(key).squares),
+        },
+      ]),
+    ),
+  };
+}
+
+function cellsOf(studies: GroupStudies): CellCount[] {
+  const { women, men } = studies;
+  return women.places.flatMap(({ placeId, checks }, place) =>
+    checks.map((check, at) => ({
+      placeId,
+      ruleId: check.ruleId,
+      ...(check.silent === undefined
+        ? counted(studies, { women: check, men: men.places[place]?.checks[at] as CompiledCheck })
+        : { silent: check.silent, ...NOBODY_COUNTED, unknown: false }),
+    })),
+  );
+}
+
+function everywhere(studies: GroupStudies, ticks: Ticks): Everywhere[] {
+  const asked = { women: byRule(studies.women, ticks), men: byRule(studies.men, ticks) };
+  return [...asked.women].map(([ruleId, checks]) => {
+    const demands = bothSexes(studies, (group) => demandOf(asked[group].get(ruleId) ?? []));
+    const reads = new Set(checks.flatMap((check) => check.reads));
+    return {
+      ruleId,
+      demands,
+      reads: [...reads].filter((key) => !TELLING.includes(key)).slice(0, OWN_MEASURES),
+      twoSided: checks.some((check) => check.twoSided),
+      ...counted(studies, demands),
+    };
+  });
+}
+
+/** What each ticked rule says at ticked places, where it says something. */
+function byRule({ places }: GroupStudy, ticks: Ticks): Map<string, CompiledCheck[]> {
+  const rules = new Map<string, CompiledCheck[]>();
+  for (const { placeId, checks } of places) {
+    if (!ticks.place(placeId)) continue;
+    for (const check of checks) {
+      if (check.silent !== undefined || !ticks.rule(check.ruleId)) continue;
+      const list = rules.get(check.ruleId);
+      if (list) list.push(check);
+      else rules.set(check.ruleId, [check]);
+    }
+  }
+  return rules;
+}
+
+/** Everything ticked as one demand on each sex. */
+const joined = (studies: GroupStudies, ticks: Ticks): Demands =>
+  bothSexes(studies, (group) => demandOf([...byRule(studies[group], ticks).values()].flat()));
+
+const demandOf = (checks: readonly CompiledCheck[]): Demands[Group] => ({
+  fits: together(checks.map(({ fits }) => fits)),
+  atLeastTight: together(checks.map(({ atLeastTight }) => atLeastTight)),
+});
+
+/** Asks once where both sexes wear the same. */
+function bothSexes(studies: GroupStudies, ask: (group: Group) => Demands[Group]): Demands {
+  const women = ask('women');
+  return { women, men: studies.men.places === studies.women.places ? women : ask('men') };
+}
+
+function counted(studies: GroupStudies, demands: Demands): FitTally {
+  const isKnown = GROUPS.every((group) =>
+    [demands[group].fits, demands[group].atLeastTight].every((demand) => known(studies[group], demand)),
+  );
+  if (!isKnown) return { ...NOBODY_COUNTED, unknown: true };
+  const count = (name: 'fits' | 'atLeastTight') =>
+    tallyOf((group) => studies[group].sets.countMeeting(demands[group][name]));
+  return { fits: count('fits'), atLeastTight: count('atLeastTight'), unknown: false };
+}
+
+const known = ({ crowd }: GroupStudy, { windows, either }: Demand): boolean =>
+  crowd.people === 0 ||
+  ([...windows.values()].every(({ need }) => crowd.isKnown(need)) &&
+    either.every((pair) => pair.every(({ need }) => crowd.isKnown(need))));
+
+function checkCount(
+  studies: GroupStudies,
+  { ruleId, demands, reads, twoSided, fits, atLeastTight, unknown }: Everywhere,
+  later: readonly Everywhere[],
+  knownKeys: readonly MeasureKey[],
+): CheckCount {
+  const setOf = (group: Group, of: Demands): PeopleSet => studies[group].sets.meeting(of[group].fits);
+  const told = unknown ? [] : knownKeys.filter((key) => TELLING.includes(key) || reads.includes(key));
+  const others = unknown ? [] : later.filter((other) => !other.unknown);
+  return {
+    ruleId,
+    twoSided,
+    fits,
+    atLeastTight,
+    unknown,
+    fitsWith: Object.fromEntries(
+      others.map((other) => [
+        other.ruleId,
+        tallyOf((group) =>
+          studies[group].sets.countOfBoth(setOf(group, demands), setOf(group, other.demands)),
+        ),
+      ]),
+    ),
+    sums: Object.fromEntries(
+      told.map((key) => [key, tallyOf((group) => studies[group].sets.sum(setOf(group, demands), key))]),
+    ),
+  };
+}
+
+const FNV_START = 0x811c9dc5;
+const FNV_PRIME = 0x01000193;
+
+/** A short name of what is asked: FNV-1a over the demands of both sexes. */
+function questionOf(studies: GroupStudies, checks: readonly Everywhere[]): string {
+  const words = [
+    ...checks.flatMap(({ ruleId, demands }) => [ruleId, demands.women.fits.key, demands.men.fits.key]),
+    ...GROUPS.flatMap((group) =>
+      studies[group].places.flatMap((place) => place.checks.map((check) => check.atLeastTight.key)),
+    ),
+  ].join('\n');
+  let hash = FNV_START;
+  for (let i = 0; i < words.length; i += 1) hash = Math.imul(hash ^ words.charCodeAt(i), FNV_PRIME);
+  return (hash >>> 0).toString(16).padStart(8, '0');
+}
