@@ -1,5 +1,5 @@
 import type { FitCell, FitSheet, RuleBook } from '@settlewright/anthropometry';
-import type { Fix, LengthStyle } from '@settlewright/geometry';
+import type { Fix, LengthStyle, SetDocument } from '@settlewright/geometry';
 import { createContext, useContext } from 'react';
 
 /** What every part of the fit sheet reads; the page that shows the sheet provides it. */
@@ -21,6 +21,10 @@ export interface FitView {
   /** Absent when the document cannot be changed here. */
   fixesFor?: (cell: FitCell) => Fix[];
   take?: (fix: Fix) => void;
+  /** What the set says about itself; absent where it is not told. */
+  asked?: SetDocument['asked'];
+  /** Absent when the document cannot be changed here. */
+  ask?: (asked: SetDocument['asked']) => void;
 }
 
 export const FitViewContext = createContext<FitView | null>(null);

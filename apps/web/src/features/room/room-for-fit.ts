@@ -30,6 +30,8 @@ export interface RoomForFit {
   open: (cellId: string | null) => void;
   fixesFor?: (cell: FitCell) => Fix[];
   take?: (fix: Fix) => void;
+  asked: SetDocument['asked'];
+  ask?: (asked: SetDocument['asked']) => void;
   clientView: boolean;
   drawerOpen: boolean;
   openDrawer: (open: boolean) => void;
@@ -70,7 +72,10 @@ export function useRoomForFit(): RoomForFit {
       light: (cellId) => store.getState().light(cellId),
       openCellId,
       open: (cellId) => store.getState().openCell(cellId),
+      asked: picture.document.asked,
       ...(canEdit && {
+        ask: (asked: SetDocument['asked']) =>
+          actions.replace({ ...picture.document, asked }, 'What this set asks'),
         fixesFor: (cell: FitCell) => suggestFixes({ document: picture.document, cell, check: maker.check }),
         take: (fix: Fix) => {
           const show = (mm: number) => formatLength(mm, style);

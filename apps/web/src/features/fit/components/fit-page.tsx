@@ -10,6 +10,8 @@ import { download } from '@/lib/download.ts';
 import { sayProblem } from '@/lib/problem.ts';
 import type { RowOrder } from '../columns.ts';
 import { useFitView } from '../fit-view.ts';
+import { AskedForm } from './asked-form.tsx';
+import { AtOdds } from './at-odds.tsx';
 import { CountedApart } from './counted-apart.tsx';
 import { FitGrid } from './fit-grid.tsx';
 import { FitCaution, FitConfidence, FitKey } from './fit-key.tsx';
@@ -103,6 +105,8 @@ export function FitPage({ roomTo, papersAt }: FitPageProps) {
       <div className="mt-10">
         <PiecesAndWays />
       </div>
+      <AtOdds />
+      <AskedForm />
       <div className="mt-6 flex flex-wrap justify-between gap-x-8 gap-y-2">
         <p className="text-sm text-ink-2 max-tablet:hidden">
           Arrow keys move between cells, Enter opens one, Escape closes it.

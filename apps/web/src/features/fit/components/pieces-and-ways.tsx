@@ -7,13 +7,14 @@ import { CellSlip } from './cell-slip.tsx';
 import { CellContent } from './fit-cell.tsx';
 
 function ClauseParts({ cell }: { cell: FitCell }) {
-  const { style } = useFitView();
+  const { style, ruleBook } = useFitView();
   if (cell.outcome.kind !== 'clause') return null;
+  const { unit } = ruleBook.rule(cell.ruleId);
   return (
     <ul className="text-xs text-ink-2">
       {cell.outcome.parts.map((part) => (
         <li key={part.label}>
-          {part.label} {amountText(part.value, 'mm', style)}: {part.inside ? 'inside' : 'outside'}
+          {part.label} {amountText(part.value, unit, style)}: {part.inside ? 'inside' : 'outside'}
         </li>
       ))}
     </ul>
@@ -55,30 +56,14 @@ function Line({ cell }: { cell: FitCell }) {
 
 /** Rules about a bench, a table, a pair or a way, and the code clauses. */
 export function PiecesAndWays() {
-  const { sheet, ruleBook } = useFitView();
+  const { sheet } = useFitView();
   const asked = sheet.piecesAndWays.filter(
     ({ outcome }) =>
       outcome.kind === 'verdict' || outcome.kind === 'clause' || outcome.kind === 'information',
   );
-  const clausesNotAsked = sheet.piecesAndWays.filter(({ outcome }) => outcome.kind === 'notAsked');
-  const [first] = clausesNotAsked;
   return (
     <section>
-      <RuleHeading
-        aside={
-          first?.outcome.kind === 'notAsked' ? (
-            <span className="text-sm text-ink-2">
-              Accessible pieces,{' '}
-              {[...new Set(clausesNotAsked.map(({ ruleId }) => ruleBook.rule(ruleId).clause ?? ruleId))].join(
-                ', ',
-              )}
-              : not asked, {first.outcome.reason}
-            </span>
-          ) : undefined
-        }
-      >
-        Pieces and ways
-      </RuleHeading>
+      <RuleHeading>Pieces and ways</RuleHeading>
       {asked.length === 0 ? (
         <p className="text-ink-2">Nothing to say yet: no bench, table or way is asked about.</p>
       ) : (
@@ -88,6 +73,31 @@ export function PiecesAndWays() {
           ))}
         </ul>
       )}
+      <NotAsked />
     </section>
+  );
+}
+
+/** What the crew would have to say before these can be asked: "no spot for turning round is marked: Turning space". */
+function NotAsked() {
+  const { sheet, ruleBook } = useFitView();
+  const reasons = new Map<string, Set<string>>();
+  for (const cell of [...sheet.rows.flatMap((row) => row.cells), ...sheet.piecesAndWays]) {
+    const { outcome } = cell;
+    if (outcome.kind !== 'notAsked') continue;
+    reasons.set(outcome.reason, (reasons.get(outcome.reason) ?? new Set()).add(checkName(ruleBook, cell)));
+  }
+  if (reasons.size === 0) return null;
+  return (
+    <div className="mt-4 max-w-text text-sm text-ink-2">
+      <h3 className="font-medium">Not asked</h3>
+      <ul>
+        {[...reasons].map(([reason, names]) => (
+          <li key={reason}>
+            {[...names].join(', ')}: {reason}
+          </li>
+        ))}
+      </ul>
+    </div>
   );
 }
