@@ -13,6 +13,7 @@ export * from './checks/confidence.ts';
 export * from './checks/rule-conflicts.ts';
 export * from './checks/seat-sink.ts';
 export { checkSet, type CheckInput } from './checks/check-set.ts';
+export { unlikePlaces } from './checks/unlike-places.ts';
 export type { CheckSettings } from './checks/piece-check.ts';
 export { codeLoad } from './checks/bench-checks.ts';
 export { fullLegStretchMm } from './checks/table-checks.ts';

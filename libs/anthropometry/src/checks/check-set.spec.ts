@@ -13,9 +13,10 @@ import {
   sitter,
   verdictOf,
 } from '../../test/example-set.ts';
-import { fitRules, ruleBook } from '../../test/seed.ts';
+import { fitRules, model, ruleBook } from '../../test/seed.ts';
 import { TAPE_MEASURE_KEYS } from '../measures/measures.ts';
 import type { KnownPerson } from '../people/person.ts';
+import { checkSet } from './check-set.ts';
 import { loadRuleBook, ruleNumber, whyFor } from './rule-book.ts';
 
 const FOAM = { thicknessMm: 95, ifd25N: 222, supportFactor: 2.2 };
@@ -105,6 +106,19 @@ describe('the sheet', () => {
   it('lists the places nobody sits at', () => {
     const places = [furnished(), place({ placeId: 'b1:2', place: 2 })];
     expect(check(set({ places }), [sitter(person())]).emptyPlaceIds).toEqual(['b1:2']);
+  });
+
+  it('says the same of the sitters where the public is left out', () => {
+    const asked = {
+      situation: set({ places: [furnished()] }),
+      sitters: [sitter(person())],
+      ruleBook,
+      model,
+      settings: { backPosture: 'dining', trafficBehind: 'none' },
+    } as const;
+    const [whole, alone] = [checkSet(asked), checkSet({ ...asked, sittersOnly: true })];
+    expect(whole.publicRow.cells.length).toBeGreaterThan(0);
+    expect(alone).toEqual({ ...whole, publicRow: { cells: [] } });
   });
 
   it('keeps a row for a sitter whose place is gone', () => {

@@ -17,6 +17,7 @@ import { PIECE_CHECKS } from './piece-checks.ts';
 import type { Rule, RuleBook } from './rule-book.ts';
 import { REFERENCE_SITTER_KG } from './seat-sink.ts';
 import type { PlaceSituation, SetSituation } from './situation.ts';
+import { unlikePlaces } from './unlike-places.ts';
 import { find, judge, writeOut, type Judgement } from './verdict.ts';
 
 /** Everything a fit sheet is made from. */
@@ -26,6 +27,8 @@ export interface CheckInput {
   ruleBook: RuleBook;
   model: BodyModel;
   settings: CheckSettings;
+  /** Leaves the row of the public empty, where many sets are tried for the same sitters. */
+  sittersOnly?: boolean;
 }
 
 /** Worst first: what is not known is never better than tight. */
@@ -52,7 +55,7 @@ export function checkSet(input: CheckInput): FitSheet {
   }
   return {
     rows,
-    publicRow: publicRowOf(input),
+    publicRow: input.sittersOnly ? { cells: [] } : publicRowOf(input),
     piecesAndWays: PIECE_CHECKS.flatMap(({ id, ask }) => {
       const rule = ruleBook.rule(id);
       const judgement = judgementOf(input, rule);
@@ -66,15 +69,33 @@ export function checkSet(input: CheckInput): FitSheet {
   };
 }
 
-const confidenceOf = ({ ruleBook, settings }: CheckInput): number =>
+/**
+ * One row of the sheet by itself: a sitter against every rule of a person, without the public and the pieces.
+ *
+ * @param input - as for `checkSet`
+ * @param sitter - whoever is asked about; the sitters of the input do not matter
+ * @returns the row that `checkSet` would make of this sitter
+ * @throws RangeError as `checkSet`
+ */
+export function checkSitter(input: Omit<CheckInput, 'sitters'>, sitter: Sitter): SitterRow {
+  const place = input.situation.places.find(({ placeId }) => placeId === sitter.placeId);
+  return rowOf(input, sitter, place);
+}
+
+const confidenceOf = ({ ruleBook, settings }: Pick<CheckInput, 'ruleBook' | 'settings'>): number =>
   settings.confidence ?? ruleBook.confidence;
 
-const judgementOf = (input: CheckInput, rule: Rule): Judgement => ({
+/** How sure the verdicts of a rule must be here. */
+export const judgementOf = (input: Pick<CheckInput, 'ruleBook' | 'settings'>, rule: Rule): Judgement => ({
   confidence: confidenceOf(input),
   tolerance: input.ruleBook.boundaryTolerance[rule.unit],
 });
 
-function rowOf(input: CheckInput, sitter: Sitter, place: PlaceSituation | undefined): SitterRow {
+function rowOf(
+  input: Omit<CheckInput, 'sitters'>,
+  sitter: Sitter,
+  place: PlaceSituation | undefined,
+): SitterRow {
   const { ruleBook, model, settings } = input;
   const { lensHeightMm } = settings;
   const body = model.predict(sitter.person);
@@ -138,13 +159,14 @@ function answered(said: Said, judgement: Judgement): Answered {
   };
 }
 
-interface Found {
+/** One thing a rule looked at and what was found. */
+export interface Found {
   answer: Answer;
   finding: ReturnType<typeof find>;
 }
 
 /** At least one answer, the worst first. */
-function worstFirst(answers: readonly Answer[], judgement: Judgement): [Found, ...Found[]] {
+export function worstFirst(answers: readonly Answer[], judgement: Judgement): [Found, ...Found[]] {
   const found = answers.map((answer): Found => ({ answer, finding: find(answer.question, judgement) }));
   found.sort((a, b) => (isWorse(a.finding, b.finding) ? -1 : isWorse(b.finding, a.finding) ? 1 : 0));
   return found as [Found, ...Found[]];
@@ -168,7 +190,7 @@ function cellPieces(
 /** The public: each rule at the end of the population it protects, at the place where that is worst. */
 function publicRowOf(input: CheckInput): PublicRow {
   const { ruleBook } = input;
-  const places = unlike(input.situation.places);
+  const places = unlikePlaces(input.situation.places);
   const cells = PERSON_CHECKS.map((check) => {
     const personal = ruleBook.rule(check.id);
     const rule = personal.publicRule ? ruleBook.rule(personal.publicRule) : personal;
@@ -187,19 +209,6 @@ function publicRowOf(input: CheckInput): PublicRow {
     };
   });
   return { cells };
-}
-
-/** Names tell places apart, but not what they offer. */
-const NAMES = new Set(['placeId', 'pieceId', 'mark', 'place']);
-
-/** One place of each kind: places that offer the same numbers serve the public alike. */
-function unlike(places: readonly PlaceSituation[]): PlaceSituation[] {
-  const found = new Map<string, PlaceSituation>();
-  for (const place of places) {
-    const offer = JSON.stringify(place, (key, value: unknown) => (NAMES.has(key) ? undefined : value));
-    if (!found.has(offer)) found.set(offer, place);
-  }
-  return [...found.values()];
 }
 
 /** What a rule says of the public at the place where that is worst; a verdict stands before any silence. */
