@@ -12,17 +12,32 @@ export * from './checks/rule-book.ts';
 export * from './checks/confidence.ts';
 export * from './checks/rule-conflicts.ts';
 export * from './checks/seat-sink.ts';
-export { checkSet, type CheckInput } from './checks/check-set.ts';
+export { checkSet, checkSitter, type CheckInput } from './checks/check-set.ts';
 export { unlikePlaces } from './checks/unlike-places.ts';
 export type { CheckSettings } from './checks/piece-check.ts';
+export { PERSON_CHECKS } from './checks/person-checks.ts';
 export { codeLoad } from './checks/bench-checks.ts';
 export { fullLegStretchMm } from './checks/table-checks.ts';
 export { readSurvey, type Survey, type SurveyGroup } from './populations/survey.ts';
 export * from './populations/survey-rows.ts';
-export { summarise, type SurveySummary } from './populations/summarise.ts';
+export { LEAST_PEOPLE, summarise, type SurveySummary } from './populations/summarise.ts';
 export { completeSummary, type WholeSummary } from './populations/complete-summary.ts';
 export { fillGaps, type Filled } from './populations/fill-gaps.ts';
 export { isLogged, momentsOf, workedOf, type Moments, type Worked } from './populations/worked.ts';
+export {
+  nextMeasures,
+  type NextMeasure,
+  type NextMeasures,
+  type NextMeasureKey,
+} from './checks/next-measure.ts';
+export { standIn, type PartDifference, type StandInAnswer, type StandInCheck } from './checks/stand-in.ts';
+export { createStudy, type Study, type StudySetup, type Ticked } from './studies/study.ts';
+export { mergePartials, type FitTally, type Group, type PartialStudy, type Tally } from './studies/counts.ts';
+export type { Wear } from './studies/symbols.ts';
+export * from './studies/shares.ts';
+export type { Lost, LostTrait } from './studies/lost.ts';
+export { SURVEY_CAUTION, type Caution } from './studies/caution.ts';
+export * from './studies/curve.ts';
 export type { Draws, Population, PopulationKind } from './populations/population.ts';
 export { mixOf, mixPopulations } from './populations/mix.ts';
 export { civilians2015 } from './populations/civilian.ts';
@@ -35,10 +50,3 @@ export {
   type ChildSizeMark,
 } from './populations/children-file.ts';
 export { childrenOfMark } from './populations/children.ts';
-export { createStudy, type Study, type StudySetup, type Ticked } from './studies/study.ts';
-export { mergePartials, type FitTally, type Group, type PartialStudy, type Tally } from './studies/counts.ts';
-export type { Wear } from './studies/symbols.ts';
-export * from './studies/shares.ts';
-export type { Lost, LostTrait } from './studies/lost.ts';
-export { SURVEY_CAUTION, type Caution } from './studies/caution.ts';
-export * from './studies/curve.ts';

@@ -3,7 +3,7 @@ import { lapTable, place, set, sill } from '../../test/example-set.ts';
 import { model, ruleBook } from '../../test/seed.ts';
 import { quantile } from '../people/estimate.ts';
 import type { KnownPerson } from '../people/person.ts';
-import { checkSet } from './check-set.ts';
+import { checkSitter } from './check-set.ts';
 import type { SitterRow } from './fit-sheet.ts';
 import { isUncertainCell, nextMeasures } from './next-measure.ts';
 import type { PlaceSituation } from './situation.ts';
@@ -19,17 +19,16 @@ const TOLD: KnownPerson = {
 
 const rowAt =
   (at: PlaceSituation) =>
-  (person: KnownPerson): SitterRow => {
-    const [row] = checkSet({
-      situation: set({ places: [at] }),
-      sitters: [{ id: 's', name: 'S', kind: 'cast', placeId: at.placeId, person }],
-      ruleBook,
-      model,
-      settings: { backPosture: 'dining', trafficBehind: 'none' },
-    }).rows;
-    if (!row) throw new Error('no row');
-    return row;
-  };
+  (person: KnownPerson): SitterRow =>
+    checkSitter(
+      {
+        situation: set({ places: [at] }),
+        ruleBook,
+        model,
+        settings: { backPosture: 'dining', trafficBehind: 'none' },
+      },
+      { id: 's', name: 'S', kind: 'cast', placeId: at.placeId, person },
+    );
 
 const next = (at: PlaceSituation, person: KnownPerson) =>
   nextMeasures({ person, model, rowFor: rowAt(at), confidence: CONFIDENCE });
