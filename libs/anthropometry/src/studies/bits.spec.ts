@@ -20,7 +20,7 @@ import {
   type Bits,
 } from './bits.ts';
 import { rankOf, sortNeed } from './sort-need.ts';
-import { askSymbols } from './symbols.ts';
+import { askSymbols, createSymbols } from './symbols.ts';
 
 const needs = fc.array(fc.integer({ min: -2000, max: 2000 }), { maxLength: 150 });
 const end = fc.integer({ min: -2100, max: 2100 });
@@ -102,8 +102,8 @@ describe('a rule that decides by a value of the body', () => {
       id: 'SEAT-05',
       ask: ({ body }) => (body.mean('hip_breadth_sitting') > 400 ? [] : { reason: 'small' }),
     };
-    expect(() =>
-      askSymbols(check, ruleBook.rule('SEAT-05'), place(), { shoeMm: 25, clothing: 'medium' }),
-    ).toThrow('SEAT-05 reads values of a body');
+    const symbols = createSymbols({ shoeMm: 25, clothing: 'medium' });
+    const asked = { rule: ruleBook.rule('SEAT-05'), place: place(), symbols };
+    expect(() => askSymbols(check, asked)).toThrow('reads values of a body');
   });
 });

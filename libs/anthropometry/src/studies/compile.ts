@@ -6,7 +6,7 @@ import type { PlaceSituation } from '../checks/situation.ts';
 import type { Question } from '../checks/verdict.ts';
 import type { MeasureKey } from '../measures/measures.ts';
 import { windowFrom, windowOf, type Firmness, type Window } from './need.ts';
-import { askSymbols, type Symbols, type Wear } from './symbols.ts';
+import { askSymbols, createSymbols, type Symbols, type Wear } from './symbols.ts';
 
 /** People who keep within every window, and within one or the other of every pair. */
 export interface Demand {
@@ -16,8 +16,13 @@ export interface Demand {
   possible: boolean;
   /** One window a need. */
   windows: ReadonlyMap<string, Window>;
-  /** Lines of which the looser one hangs on the person. */
-  either: readonly (readonly [Window, Window])[];
+  either: readonly Either[];
+}
+
+/** Two lines of one side of which the looser one hangs on the person. */
+export interface Either {
+  key: string;
+  pair: readonly [Window, Window];
 }
 
 /** What one rule asks of bodies at one place. */
@@ -58,11 +63,12 @@ export function compilePlace(
   ruleBook: RuleBook,
   lensHeightMm?: number,
 ): CompiledPlace {
+  const symbols = createSymbols(wear);
   return {
     placeId: place.placeId,
     checks: PERSON_CHECKS.map((check) => {
       const rule = ruleBook.rule(check.id);
-      const { said, symbols } = askSymbols(check, rule, place, wear, lensHeightMm);
+      const said = askSymbols(check, { rule, place, symbols, lensHeightMm });
       return compiled(rule.id, said, (amount) =>
         roomOf(amount, symbols, place, ruleBook.boundaryTolerance[rule.unit]),
       );
@@ -129,7 +135,7 @@ function roomOf(
 function demandOf(choices: readonly (readonly (Window | boolean)[])[]): Demand {
   let possible = true;
   const windows = new Map<string, Window>();
-  const either: [Window, Window][] = [];
+  const either: Either[] = [];
   for (const choice of choices) {
     if (choice.includes(true)) continue;
     const open = choice.filter((line) => typeof line !== 'boolean');
@@ -137,7 +143,7 @@ function demandOf(choices: readonly (readonly (Window | boolean)[])[]): Demand {
     if (!first) possible = false;
     else if (!second) narrow(windows, first);
     else if (first.need.id === second.need.id) narrow(windows, looser(first, second));
-    else either.push([first, second]);
+    else either.push({ key: `${first.key}|${second.key}`, pair: [first, second] });
   }
   return demandFrom(possible, windows, either);
 }
@@ -164,7 +170,7 @@ function narrow(windows: Map<string, Window>, window: Window): void {
 export function together(demands: Iterable<Demand>): Demand {
   let possible = true;
   const windows = new Map<string, Window>();
-  const either: (readonly [Window, Window])[] = [];
+  const either: Either[] = [];
   for (const demand of demands) {
     possible &&= demand.possible;
     for (const window of demand.windows.values()) narrow(windows, window);
@@ -176,7 +182,7 @@ export function together(demands: Iterable<Demand>): Demand {
 function demandFrom(possible: boolean, windows: Demand['windows'], either: Demand['either']): Demand {
   if (!possible) return { key: 'nobody', possible, windows, either };
   const keys = Array.from(windows.values(), ({ key }) => key);
-  for (const pair of either) keys.push(pair.map(({ key }) => key).join('|'));
+  for (const { key } of either) keys.push(key);
   return { key: keys.sort().join('&'), possible, windows, either };
 }
 

@@ -178,7 +178,7 @@ function counted(studies: GroupStudies, demands: Demands): FitTally {
 const known = ({ crowd }: GroupStudy, { windows, either }: Demand): boolean =>
   crowd.people === 0 ||
   ([...windows.values()].every(({ need }) => crowd.isKnown(need)) &&
-    either.every((pair) => pair.every(({ need }) => crowd.isKnown(need))));
+    either.every(({ pair }) => pair.every(({ need }) => crowd.isKnown(need))));
 
 function checkCount(
   studies: GroupStudies,

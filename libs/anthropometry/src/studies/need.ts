@@ -77,7 +77,9 @@ const largest = (parts: Need['parts']): number | undefined =>
   );
 
 function needOf(parts: Need['parts'], sink: Need['sink']): Need {
-  const names = parts.map(([key, factor]) => `${factor.toPrecision(DIGITS)}*${key}`);
+  const names: string[] = parts.map(([key, factor]) =>
+    factor === 1 ? key : `${factor.toPrecision(DIGITS)}*${key}`,
+  );
   if (sink) names.push(`${sink.factor.toPrecision(DIGITS)}*sink ${foamName(sink.foam)}`);
   return { id: names.join('+'), parts, ...(sink ? { sink } : {}) };
 }

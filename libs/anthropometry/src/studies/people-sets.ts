@@ -10,7 +10,7 @@ import {
   without,
   type Bits,
 } from './bits.ts';
-import type { Demand } from './compile.ts';
+import type { Demand, Either } from './compile.ts';
 import type { Crowd } from './crowd.ts';
 import type { Window } from './need.ts';
 
@@ -49,6 +49,7 @@ export function createPeopleSets(crowd: Crowd): PeopleSets {
   const sets = new Map<string, Kept<PeopleSet>>();
   /** By need. */
   const windows = new Map<string, Kept<{ window: Window; bits: Bits }>[]>();
+  const eithers = new Map<string, Kept<Bits>>();
   const totals = new Map<MeasureKey, { sum: number; squares: number }>();
   let round = 0;
 
@@ -74,12 +75,22 @@ export function createPeopleSets(crowd: Crowd): PeopleSets {
     return bits;
   }
 
+  function withinEither({ key, pair: [one, other] }: Either): Bits {
+    let known = eithers.get(key);
+    if (!known) {
+      known = { value: inEither(within(one), within(other)), round };
+      eithers.set(key, known);
+    }
+    known.round = round;
+    return known.value;
+  }
+
   function made(demand: Demand): PeopleSet {
     const parts: Bits[] = [];
     if (!demand.possible) parts.push(new Uint32Array(all.length));
     else {
       for (const window of demand.windows.values()) parts.push(within(window));
-      for (const [one, other] of demand.either) parts.push(inEither(within(one), within(other)));
+      for (const either of demand.either) parts.push(withinEither(either));
     }
     const bits = parts.length > 1 ? inAll(parts) : (parts[0] ?? all);
     return { bits, count: countOf(bits), sums: new Map(), both: new WeakMap() };
@@ -107,7 +118,9 @@ export function createPeopleSets(crowd: Crowd): PeopleSets {
     nextRound() {
       round += 1;
       const stays = (kept: Kept<unknown>): boolean => kept.round >= round - ROUNDS_KEPT;
-      for (const [key, set] of sets) if (!stays(set)) sets.delete(key);
+      for (const map of [sets, eithers] as Map<string, Kept<unknown>>[]) {
+        for (const [key, one] of map) if (!stays(one)) map.delete(key);
+      }
       for (const [key, alike] of windows) windows.set(key, alike.filter(stays));
     },
     meeting,
