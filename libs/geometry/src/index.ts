@@ -70,5 +70,6 @@ export {
   type SuggestInput,
   type Tried,
 } from './choices/candidates.ts';
+export { judgeChoices, type Judging, type Served } from './choices/judge-choices.ts';
 export { suggestDimensions } from './choices/suggest-dimensions.ts';
 export type { Answer, AnswerKind, Blame, Suggestion } from './choices/suggest-dimensions.ts';

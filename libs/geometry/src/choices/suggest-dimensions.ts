@@ -31,11 +31,11 @@ export interface Suggestion {
   of: number;
   present: Tried | undefined;
   answers: Answer[];
-  /** Set when no answer serves everybody. */
+  /** Set at the end, when no answer serves everybody. */
   blame?: Blame;
 }
 
-const MOST = 900;
+const MOST = 600;
 /** Choices strewn over the whole range before the best are refined. */
 const STREWN = 24;
 /** Best choices that are refined, far enough from each other. */
@@ -87,7 +87,9 @@ export function* suggestDimensions(input: SuggestInput): Generator<Suggestion, S
     yield* attempt(strewn(free, n));
   }
   for (const start of starts(trials, free)) yield* refine(start, free, attempt, () => done < most);
-  return { ...told(), of: done };
+  const end = { ...told(), of: done };
+  const blame = blameOf(trials.all(), end.answers[0]?.tried.misses ?? []);
+  return { ...end, ...(blame ? { blame } : {}) };
 }
 
 /** The n-th point of an even additive sequence over the ranges. */
@@ -168,8 +170,7 @@ function resultOf(trials: Trials, done: number, of: number, { free }: SuggestInp
   const apart = equal.filter((one) => answers.every(({ tried }) => gapOf(one, tried, free) > APART));
   const another = least(apart, costOf);
   if (another) answers.push({ kind: 'another', tried: another });
-  const blame = best.misses.length > 0 ? blameOf(all, best) : undefined;
-  return { done, of, present, answers, ...(blame ? { blame } : {}) };
+  return { done, of, present, answers };
 }
 
 function least(all: readonly Tried[], costing: (tried: Tried) => number): Tried | undefined {
@@ -182,14 +183,11 @@ function least(all: readonly Tried[], costing: (tried: Tried) => number): Tried 
   return best;
 }
 
-/** The sitter or the rule without which the fewest misses are left. */
-function blameOf(all: readonly Tried[], best: Tried): Blame | undefined {
+/** Of the sitters and the rules that the best answer misses, the one without which the fewest misses are left. */
+function blameOf(all: readonly Tried[], missed: readonly Miss[]): Blame | undefined {
   const suspects: Omit<Blame, 'left'>[] = [
-    ...[...new Set(best.misses.map(({ sitterId }) => sitterId))].map((id) => ({
-      kind: 'sitter' as const,
-      id,
-    })),
-    ...[...new Set(best.misses.map(({ ruleId }) => ruleId))].map((id) => ({ kind: 'rule' as const, id })),
+    ...[...new Set(missed.map(({ sitterId }) => sitterId))].map((id) => ({ kind: 'sitter' as const, id })),
+    ...[...new Set(missed.map(({ ruleId }) => ruleId))].map((id) => ({ kind: 'rule' as const, id })),
   ];
   const judged = suspects.map((suspect): Blame => {
     const own = ({ sitterId, ruleId }: Miss) =>
