@@ -55,9 +55,8 @@ export const foamName = ({ ifd25N, supportFactor }: Firmness): string => `${ifd2
  * @returns the window of the need, or plain yes or no when no body enters
  */
 export function windowOf({ constant, factors, sink }: Room): Window | boolean {
-  const parts = MEASURE_KEYS.map((key) => [key, factors.get(key) ?? 0] as const).filter(
-    ([, factor]) => Math.abs(factor) > NOTHING,
-  );
+  const parts = [...factors].filter(([, factor]) => Math.abs(factor) > NOTHING);
+  if (parts.length > 1) parts.sort(([a], [b]) => orderOf(a) - orderOf(b));
   const sinks = sink !== undefined && Math.abs(sink.factor) > NOTHING;
   const lead = largest(parts) ?? (sinks ? Math.sign(sink.factor) : 0);
   if (lead === 0) return constant >= 0;
@@ -68,6 +67,8 @@ export function windowOf({ constant, factors, sink }: Room): Window | boolean {
   const end = steps(-constant / lead);
   return lead > 0 ? windowFrom(need, end, OPEN) : windowFrom(need, -OPEN, end);
 }
+
+const orderOf = (key: MeasureKey): number => MEASURE_KEYS.indexOf(key);
 
 /** Of factors alike in size the first. */
 const largest = (parts: Need['parts']): number | undefined =>
