@@ -3,12 +3,12 @@ import { MEASURE_INFO } from '../measures/measure-info.ts';
 import type { Survey, SurveyGroup } from './survey.ts';
 
 /** Units that a column may be written in, with the factor to millimetres or kilograms. */
-const UNITS = {
+export const SURVEY_UNITS = {
   mm: { mm: 1, cm: 10, m: 1000, in: 25.4 },
   kg: { kg: 1, '0.1kg': 0.1, lb: 0.45359237 },
 } as const;
-export type LengthUnit = keyof (typeof UNITS)['mm'];
-export type WeightUnit = keyof (typeof UNITS)['kg'];
+export type LengthUnit = keyof (typeof SURVEY_UNITS)['mm'];
+export type WeightUnit = keyof (typeof SURVEY_UNITS)['kg'];
 
 /** One column of a table of people, as text. */
 export interface TextColumn {
@@ -105,7 +105,7 @@ export function readPeople(table: PeopleTable, reference?: Survey): ReadPeople {
 
 function factorOf(table: PeopleTable, key: MeasureKey, total: number): number {
   const { name, unit, values } = table.measures[key] as TextColumn & { unit: string };
-  const units: Readonly<Record<string, number>> = UNITS[MEASURE_INFO[key].unit];
+  const units: Readonly<Record<string, number>> = SURVEY_UNITS[MEASURE_INFO[key].unit];
   const factor = units[unit];
   if (factor === undefined) {
     throw new Error(`${name}: unit is ${unit}; accepted for ${key}: ${Object.keys(units).join(', ')}`);
