@@ -1,4 +1,3 @@
-import { readFileSync } from 'node:fs';
 import {
   type BodyModel,
   checkSet,
@@ -11,11 +10,8 @@ import {
 import { measureSet, type SetDocument, type SitterRef } from '@settlewright/geometry';
 import { Injectable } from '@nestjs/common';
 import type { CastPerson } from '../cast/known-person';
+import { readSeedData } from '../common/seed-data';
 import { type RoundedBody, roundedBody } from './rounded-body';
-
-function readData(name: string): unknown {
-  return JSON.parse(readFileSync(require.resolve(`@settlewright/seed-data/${name}.json`), 'utf8'));
-}
 
 const ORDINALS = new Intl.PluralRules('en', { type: 'ordinal' });
 const ENDINGS: Partial<Record<Intl.LDMLPluralRule, string>> = { one: 'st', two: 'nd', few: 'rd' };
@@ -24,8 +20,8 @@ const ONE: Record<'women' | 'men', string> = { women: 'Woman', men: 'Man' };
 /** Makes fit sheets on the server, so that verdicts can be shown to people who may not see measures. */
 @Injectable()
 export class FitCheckService {
-  readonly ruleBook: RuleBook = loadRuleBook(readData('fit-rules'));
-  private readonly model: BodyModel = createBodyModel(readData('populations/ansur2'));
+  readonly ruleBook: RuleBook = loadRuleBook(readSeedData('fit-rules'));
+  private readonly model: BodyModel = createBodyModel(readSeedData('populations/ansur2'));
 
   /** `confidence` is what the workshop asks of a verdict; null: as much as the rule book does. */
   sheetFor(document: SetDocument, cast: readonly CastPerson[], confidence: number | null): FitSheet {

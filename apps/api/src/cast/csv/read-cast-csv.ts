@@ -1,11 +1,9 @@
-import Papa from 'papaparse';
-import { Problem } from '../../common/problem';
+import { type CsvRow, csvRefused, readCsvRows } from '../../common/csv-rows';
 import { withoutGuard } from '../../common/spreadsheet-cell';
 import type { UnitSystem } from '../../productions/entities/production.entity';
 import { type CastRow, type CellProblem, type FileSetting, readCastRow } from './cast-row';
 import { type Column, readColumns } from './columns';
 
-const CSV_MAX_BYTES = 2_000_000;
 export const CSV_MAX_ROWS = 2_000;
 
 export interface ReadRow {
@@ -23,32 +21,26 @@ export interface ReadCsv {
   rows: ReadRow[];
 }
 
-interface RawRow {
-  line: number;
-  cells: string[];
-  fault?: string;
-}
-
 /** Reads a list of people. A file that is no such list is refused whole; a bad row only by itself. */
 export function readCastCsv(csv: string, units: UnitSystem, existingNames: readonly string[]): ReadCsv {
-  const { delimiter, rows } = splitRows(csv);
+  const { delimiter, rows } = readCsvRows(csv);
   const [head, ...body] = rows;
   if (!head)
-    throw refused('csv-empty', 'The file is empty; accepted is a header line and a line for each person.');
+    throw csvRefused('csv-empty', 'The file is empty; accepted is a header line and a line for each person.');
   const { columns, ignored, repeated } = readColumns(head.cells.map(withoutGuard));
   const twice = repeated[0];
   if (twice) {
-    throw refused(
+    throw csvRefused(
       'csv-column-twice',
       `The columns ${twice.headers.join(' and ')} both mean ${twice.key}. Keep one.`,
     );
   }
   if (!columns.some(({ key }) => key === 'name')) {
     const read = head.cells.slice(0, 8).join(', ').slice(0, 120);
-    throw refused('csv-no-name', `No column is called "name". The first line reads: ${read}`);
+    throw csvRefused('csv-no-name', `No column is called "name". The first line reads: ${read}`);
   }
   if (body.length > CSV_MAX_ROWS) {
-    throw refused(
+    throw csvRefused(
       'csv-too-many-rows',
       `The file has ${body.length} rows; accepted are up to ${CSV_MAX_ROWS}.`,
     );
@@ -63,33 +55,7 @@ export function readCastCsv(csv: string, units: UnitSystem, existingNames: reado
   return { columns, ignoredColumns: ignored, rows: withDuplicates(read, existingNames) };
 }
 
-function splitRows(csv: string): { delimiter: string; rows: RawRow[] } {
-  if (Buffer.byteLength(csv) > CSV_MAX_BYTES) {
-    throw new Problem(413, 'csv-too-large', 'The file is larger than 2 MB. Split it and bring in the parts.');
-  }
-  const text = csv.replace(/^\ufeff/, '').replace(/\r\n?/g, '\n');
-  if (text.includes('\0') || /\p{Cs}/u.test(text)) {
-    throw refused('csv-not-text', 'The file is not text. Save the table as CSV (UTF-8) and bring that in.');
-  }
-  const rows: RawRow[] = [];
-  let delimiter = ',';
-  let at = 0;
-  let line = 1;
-  Papa.parse<string[]>(text, {
-    delimitersToGuess: [',', ';', '\t', '|'],
-    step: ({ data, errors, meta }) => {
-      delimiter = meta.delimiter;
-      const fault = errors.find(({ code }) => code !== 'UndetectableDelimiter')?.message;
-      if (data.some((cell) => cell.trim() !== ''))
-        rows.push({ line, cells: data, ...(fault ? { fault } : {}) });
-      line += text.slice(at, meta.cursor).split('\n').length - 1;
-      at = meta.cursor;
-    },
-  });
-  return { delimiter, rows };
-}
-
-function readRow(row: RawRow, columns: Column[], setting: FileSetting, width: number): ReadRow {
+function readRow(row: CsvRow, columns: Column[], setting: FileSetting, width: number): ReadRow {
   const surplus = row.cells.slice(width).filter((cell) => cell.trim() !== '');
   const whole = row.cells.join(' ').slice(0, 80);
   const broken = row.fault
@@ -124,8 +90,4 @@ function withDuplicates(rows: ReadRow[], existingNames: readonly string[]): Read
     const message = `${name} is also the name of ${other}. Both are kept.`;
     return { ...row, warnings: [{ column: 'name', read: name, accepted: 'a name of its own', message }] };
   });
-}
-
-function refused(code: string, detail: string): Problem {
-  return new Problem(400, code, detail, [{ path: 'csv', code, message: detail }]);
 }
