@@ -14,10 +14,12 @@ import { DemoModule } from './demo/demo.module';
 import { HealthModule } from './health/health.module';
 import { InvitationsModule } from './invitations/invitations.module';
 import { MailModule } from './mail/mail.module';
+import { PopulationsModule } from './populations/populations.module';
 import { ProductionDuplicationModule } from './productions/duplication/production-duplication.module';
 import { ProductionsModule } from './productions/productions.module';
 import { RateLimitsModule } from './rate-limits/rate-limits.module';
 import { SetsModule } from './sets/sets.module';
+import { StudiesModule } from './studies/studies.module';
 import { UpholsterersModule } from './upholsterers/upholsterers.module';
 import { UsersModule } from './users/users.module';
 import { WorkshopsModule } from './workshops/workshops.module';
@@ -42,6 +44,8 @@ import { WorkshopsModule } from './workshops/workshops.module';
     ProductionsModule,
     CastModule,
     SetsModule,
+    PopulationsModule,
+    StudiesModule,
     UpholsterersModule,
     CushionOrdersModule,
     DemoModule,

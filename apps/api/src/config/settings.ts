@@ -37,6 +37,12 @@ const shared = {
   DEMO: flag.default(false),
   WEB_DIST: z.string().min(1).optional(),
   COOKIE_SECURE: flag.optional(),
+  STUDY_BLOCK_TIMEOUT_SECONDS: z.coerce
+    .number({ error: 'accepted: whole seconds from 1 to 3600' })
+    .int('accepted: whole seconds from 1 to 3600')
+    .min(1, 'accepted: whole seconds from 1 to 3600')
+    .max(3600, 'accepted: whole seconds from 1 to 3600')
+    .default(60),
   LOG_LEVEL: z.enum(['trace', 'debug', 'info', 'warn', 'error', 'fatal', 'silent']).default('info'),
 };
 
@@ -72,17 +78,25 @@ export interface Settings {
   mailFrom: string;
   /** 0: nothing is sent until asked */
   mailPollMs: number;
+  /** People whom a worker counts at a time. */
+  studyBlockPeople: number;
+  /** Studies that take no longer than this by estimate are counted before the request is answered. */
+  studyAtOnceMs: number;
+  /** For so long a block is a worker's; then its worker is taken for lost and another gets it. */
+  blockTimeoutSeconds: number;
   cookieSecure: boolean;
   logLevel: string;
   demo: boolean;
   webDist: string | null;
 }
 
-export function readSettings(env: NodeJS.ProcessEnv): Settings {
+/** A worker serves nobody, so it needs nothing but the database in production either. */
+export function readSettings(env: NodeJS.ProcessEnv, role: 'server' | 'worker' = 'server'): Settings {
   const isProduction = env.NODE_ENV === 'production';
   // An empty variable is what most process runners pass for "not set".
   const given = Object.fromEntries(Object.entries(env).filter(([, value]) => value !== ''));
-  const read = isProduction ? production.safeParse(given) : development.safeParse(given);
+  const serves = isProduction && role === 'server';
+  const read = serves ? production.safeParse(given) : development.safeParse(given);
   if (!read.success) {
     throw new SettingsError(read.error.issues.map((issue) => describeFault(issue, env)));
   }
@@ -99,6 +113,9 @@ export function readSettings(env: NodeJS.ProcessEnv): Settings {
     smtpUrl: values.SMTP_URL,
     mailFrom: values.MAIL_FROM,
     mailPollMs: 2000,
+    studyBlockPeople: 40_000,
+    studyAtOnceMs: 500,
+    blockTimeoutSeconds: values.STUDY_BLOCK_TIMEOUT_SECONDS,
     cookieSecure: values.COOKIE_SECURE ?? publicUrl.startsWith('https://'),
     logLevel: values.LOG_LEVEL,
     demo: values.DEMO,
@@ -115,5 +132,8 @@ function describeFault(issue: { path: PropertyKey[]; message: string }, env: Nod
 }
 
 export const settings = registerAs('settings', () => readSettings(process.env));
+
+/** The same settings, read for a worker. */
+export const workerSettings = registerAs('settings', () => readSettings(process.env, 'worker'));
 
 export const InjectSettings = () => Inject(settings.KEY);

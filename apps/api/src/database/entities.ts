@@ -10,6 +10,8 @@ import { OrderMessage } from '../cushion-orders/entities/order-message.entity';
 import { Invitation } from '../invitations/entities/invitation.entity';
 import { OutboxAttachment } from '../mail/entities/outbox-attachment.entity';
 import { OutboxMail } from '../mail/entities/outbox-mail.entity';
+import { OwnPopulation } from '../populations/entities/own-population.entity';
+import { PopulationRows } from '../populations/entities/population-rows.entity';
 import { Production } from '../productions/entities/production.entity';
 import { BuiltPart } from '../sets/entities/built-part.entity';
 import { DesignedSet } from '../sets/entities/designed-set.entity';
@@ -17,6 +19,8 @@ import { RevisionApproval } from '../sets/entities/revision-approval.entity';
 import { SetDraft } from '../sets/entities/set-draft.entity';
 import { SetNote } from '../sets/entities/set-note.entity';
 import { SetRevision } from '../sets/entities/set-revision.entity';
+import { Study } from '../studies/entities/study.entity';
+import { StudyBlock } from '../studies/entities/study-block.entity';
 import { Upholsterer } from '../upholsterers/entities/upholsterer.entity';
 import { User } from '../users/entities/user.entity';
 import { Membership } from '../workshops/entities/membership.entity';
@@ -37,6 +41,8 @@ export const ENTITIES = [
   OrderMessage,
   OutboxAttachment,
   OutboxMail,
+  OwnPopulation,
+  PopulationRows,
   Production,
   RefreshToken,
   RevisionApproval,
@@ -44,6 +50,8 @@ export const ENTITIES = [
   SetDraft,
   SetNote,
   SetRevision,
+  Study,
+  StudyBlock,
   Upholsterer,
   User,
   Workshop,

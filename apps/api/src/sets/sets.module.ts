@@ -55,6 +55,6 @@ import { SetsService } from './sets.service';
     BuiltPartsService,
     SetTexts,
   ],
-  exports: [DraftsService, SetsService, RevisionsService, SetTexts],
+  exports: [SetAccess, DraftsService, SetsService, RevisionsService, SetTexts],
 })
 export class SetsModule {}

@@ -1,5 +1,6 @@
 import { randomUUID } from 'node:crypto';
 import type { Shop } from '../factories/shop';
+import { surveyBody, surveyCsv } from '../factories/surveys';
 
 const W = '/workshops/{workshopId}';
 const P = `${W}/productions/{productionId}`;
@@ -32,6 +33,9 @@ export function bodiesFor(shop: Shop): Record<string, object> {
     [`POST ${S}/notes`]: { text: 'Looks right', kind: 'comment' },
     [`PATCH ${S}/notes/{noteId}`]: { resolved: true },
     [`PUT ${S}/built`]: { partId: shop.partId, built: true },
+    [`POST ${S}/studies`]: { populationId: 'british', people: 100, revisionLetter: letter },
+    [`POST ${W}/populations/preview`]: { csv: surveyCsv() },
+    [`POST ${W}/populations`]: surveyBody({ name: 'More colleagues' }),
     [`POST ${W}/upholsterers`]: { name: 'Another', email },
     [`PATCH ${W}/upholsterers/{upholstererId}`]: { notes: 'Closed on Mondays' },
     [`POST ${P}/orders`]: { setId, revisionLetter: letter, title: 'More' },

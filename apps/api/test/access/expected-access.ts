@@ -85,6 +85,20 @@ export const EXPECTED_ACCESS: Record<string, AccessRule> = {
   [`GET ${S}/built`]: EVERY_MEMBER,
   [`PUT ${S}/built`]: ['owner', 'designer', 'carpenter'],
 
+  [`GET ${S}/studies`]: EVERY_MEMBER,
+  [`POST ${S}/studies`]: MAKERS,
+  [`GET ${S}/studies/{studyId}`]: EVERY_MEMBER,
+  [`POST ${S}/studies/{studyId}/cancel`]: MAKERS,
+  [`DELETE ${S}/studies/{studyId}`]: MAKERS,
+
+  [`GET ${W}/populations`]: EVERY_MEMBER,
+  [`POST ${W}/populations`]: MAKERS,
+  [`POST ${W}/populations/preview`]: MAKERS,
+  [`GET ${W}/populations/{populationId}`]: EVERY_MEMBER,
+  [`DELETE ${W}/populations/{populationId}`]: MAKERS,
+  [`GET ${W}/populations/{populationId}/rows.csv`]: OWNER,
+  [`DELETE ${W}/populations/{populationId}/rows`]: MAKERS,
+
   [`GET ${W}/upholsterers`]: MAKERS,
   [`POST ${W}/upholsterers`]: MAKERS,
   [`PATCH ${W}/upholsterers/{upholstererId}`]: MAKERS,

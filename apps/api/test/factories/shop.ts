@@ -2,6 +2,7 @@ import { deriveParts, type SetDocument } from '@settlewright/geometry';
 import type { Role } from '../../src/common/access.decorator';
 import type { TestApp } from '../test-app';
 import { mailedToken } from './mails';
+import { surveyBody } from './surveys';
 import { as, createMember, createWorkshop, type Person } from './people';
 
 /** Numbers and words that stand nowhere else, so that they are found wherever they leak. */
@@ -76,6 +77,12 @@ export async function createShop(test: TestApp, name: string): Promise<Shop> {
     title: 'Seats and backs',
   });
   await make(`${P}/orders/${order.id}/send`, { upholstererId: upholsterer.id }, 200);
+  const population = await make(`${W}/populations`, surveyBody({ keepRows: true }));
+  const study = await make(`${S}/studies`, {
+    populationId: population.id,
+    people: 200,
+    draftNumber: draft.number,
+  });
   const invitation = await make(`${W}/invitations`, {
     email: `guest-${workshopId}@people.test`,
     role: 'reviewer',
@@ -92,6 +99,8 @@ export async function createShop(test: TestApp, name: string): Promise<Shop> {
       setId: set.id,
       letter: revision.letter,
       noteId: note.id,
+      studyId: study.id,
+      populationId: population.id,
       upholstererId: upholsterer.id,
       orderId: order.id,
     },

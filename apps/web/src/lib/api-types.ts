@@ -789,6 +789,134 @@ export interface paths {
         patch?: never;
         trace?: never;
     };
+    "/api/workshops/{workshopId}/populations": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        get: operations["Populations_list"];
+        put?: never;
+        post: operations["Populations_create"];
+        delete?: never;
+        options?: never;
+        head?: never;
+        patch?: never;
+        trace?: never;
+    };
+    "/api/workshops/{workshopId}/populations/preview": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        get?: never;
+        put?: never;
+        post: operations["Populations_preview"];
+        delete?: never;
+        options?: never;
+        head?: never;
+        patch?: never;
+        trace?: never;
+    };
+    "/api/workshops/{workshopId}/populations/{populationId}": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        get: operations["Populations_get"];
+        put?: never;
+        post?: never;
+        delete: operations["Populations_remove"];
+        options?: never;
+        head?: never;
+        patch?: never;
+        trace?: never;
+    };
+    "/api/workshops/{workshopId}/populations/{populationId}/rows.csv": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        get: operations["Populations_rows"];
+        put?: never;
+        post?: never;
+        delete?: never;
+        options?: never;
+        head?: never;
+        patch?: never;
+        trace?: never;
+    };
+    "/api/workshops/{workshopId}/populations/{populationId}/rows": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        get?: never;
+        put?: never;
+        post?: never;
+        delete: operations["Populations_forgetRows"];
+        options?: never;
+        head?: never;
+        patch?: never;
+        trace?: never;
+    };
+    "/api/workshops/{workshopId}/productions/{productionId}/sets/{setId}/studies": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        get: operations["Studies_list"];
+        put?: never;
+        post: operations["Studies_start"];
+        delete?: never;
+        options?: never;
+        head?: never;
+        patch?: never;
+        trace?: never;
+    };
+    "/api/workshops/{workshopId}/productions/{productionId}/sets/{setId}/studies/{studyId}": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        get: operations["Studies_get"];
+        put?: never;
+        post?: never;
+        delete: operations["Studies_remove"];
+        options?: never;
+        head?: never;
+        patch?: never;
+        trace?: never;
+    };
+    "/api/workshops/{workshopId}/productions/{productionId}/sets/{setId}/studies/{studyId}/cancel": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        get?: never;
+        put?: never;
+        post: operations["Studies_cancel"];
+        delete?: never;
+        options?: never;
+        head?: never;
+        patch?: never;
+        trace?: never;
+    };
     "/api/workshops/{workshopId}/upholsterers": {
         parameters: {
             query?: never;
@@ -1991,6 +2119,249 @@ export interface components {
             /** @description id of a part of the draft or of the latest revision */
             partId: string;
             built: boolean;
+        };
+        /** @enum {string} */
+        MeasureKey: "stature" | "weight_kg" | "sitting_height" | "eye_height_sitting" | "acromial_height_sitting" | "elbow_rest_height" | "popliteal_height" | "knee_height_sitting" | "buttock_popliteal_length" | "buttock_knee_length" | "thigh_clearance" | "hip_breadth_sitting" | "hip_breadth" | "bideltoid_breadth" | "forearm_forearm_breadth" | "biacromial_breadth" | "abdominal_extension_depth_sitting" | "chest_depth" | "buttock_depth" | "foot_length" | "foot_breadth" | "acromion_radiale_length" | "shoulder_elbow_length" | "forearm_hand_length" | "thumbtip_reach" | "functional_leg_length" | "head_breadth" | "head_length" | "waist_circumference" | "bicristal_breadth" | "overhead_fingertip_reach_sitting" | "span" | "waist_depth" | "hand_length" | "lateral_malleolus_height" | "trochanterion_height" | "acromial_height" | "chest_circumference" | "buttock_circumference" | "chest_breadth" | "waist_breadth";
+        PopulationDto: {
+            /** Format: uuid */
+            id: string;
+            name: string;
+            /** @description who was measured, by whom and when */
+            source: string;
+            /** @description people behind it */
+            women: number;
+            men: number;
+            /** @description rows that had a fault */
+            leftOut: number;
+            read: components["schemas"]["MeasureKey"][];
+            estimated: components["schemas"]["MeasureKey"][];
+            /** @description the measured rows themselves are kept, too */
+            rowsKept: boolean;
+            addedBy: components["schemas"]["PersonDto"];
+            /** Format: date-time */
+            addedAt: string;
+        };
+        PopulationPage: {
+            items: components["schemas"]["PopulationDto"][];
+            total: number;
+            page: number;
+            pageSize: number;
+        };
+        SexColumnDto: {
+            /** @description heading of the column */
+            column: string;
+            /** @description what stands for a woman; else f, w, female, woman, women */
+            women?: string[];
+            /** @description what stands for a man; else m, male, man, men */
+            men?: string[];
+        };
+        MeasureColumnDto: {
+            key: components["schemas"]["MeasureKey"];
+            /** @description heading of the column */
+            column: string;
+            /**
+             * @description `kg`, `0.1kg` and `lb` for the weight, the others for lengths
+             * @enum {string}
+             */
+            unit: "mm" | "cm" | "m" | "in" | "kg" | "0.1kg" | "lb";
+        };
+        MappingDto: {
+            sex: components["schemas"]["SexColumnDto"];
+            /** @description heading of the column with years of age */
+            age?: string;
+            /** @description stature and weight_kg among them */
+            measures: components["schemas"]["MeasureColumnDto"][];
+            /** @description a comma stands before the decimals */
+            decimalComma: boolean;
+        };
+        PreviewPopulationDto: {
+            /** @description the text of the file, up to 2 MB and 10000 rows */
+            csv: string;
+            /** @description the suggested one when absent */
+            mapping?: components["schemas"]["MappingDto"];
+        };
+        SurveyColumnDto: {
+            /** @description its heading */
+            name: string;
+            /** @description the first values */
+            examples: string[];
+        };
+        SuggestedMappingDto: {
+            sex?: components["schemas"]["SexColumnDto"];
+            age?: string;
+            measures: components["schemas"]["MeasureColumnDto"][];
+            decimalComma: boolean;
+        };
+        RowFaultDto: {
+            /** @description line of the file; the headings stand on line 1 */
+            line: number;
+            /** @description counted from 1, the headings not counted */
+            row: number;
+            /** @description heading of the column */
+            field: string;
+            read: string;
+            accepted: string;
+        };
+        PopulationPreviewDto: {
+            columns: components["schemas"]["SurveyColumnDto"][];
+            rows: number;
+            /** @description as sent, or as guessed from headings and values */
+            mapping: components["schemas"]["SuggestedMappingDto"];
+            /** @description why these people cannot be added as they are */
+            problems: components["schemas"]["ProblemField"][];
+            /** @description people who can be read; 0 while the mapping has problems */
+            women: number;
+            men: number;
+            /** @description rows with a fault; they would be left out */
+            leftOut: number;
+            /** @description the first 200 */
+            faults: components["schemas"]["RowFaultDto"][];
+            faultCount: number;
+            read: components["schemas"]["MeasureKey"][];
+            /** @description would be estimated from the others, as they hang together in US soldiers of 2012 */
+            estimated: components["schemas"]["MeasureKey"][];
+        };
+        CreatePopulationDto: {
+            name: string;
+            /** @description who was measured, by whom and when */
+            source: string;
+            /** @description the text of the file, up to 2 MB and 10000 rows */
+            csv: string;
+            mapping: components["schemas"]["MappingDto"];
+            /**
+             * @description keep the used columns of the rows themselves; only an owner may say so
+             * @default false
+             */
+            keepRows: boolean;
+        };
+        PopulationDetailsDto: {
+            /** Format: uuid */
+            id: string;
+            name: string;
+            /** @description who was measured, by whom and when */
+            source: string;
+            /** @description people behind it */
+            women: number;
+            men: number;
+            /** @description rows that had a fault */
+            leftOut: number;
+            read: components["schemas"]["MeasureKey"][];
+            estimated: components["schemas"]["MeasureKey"][];
+            /** @description the measured rows themselves are kept, too */
+            rowsKept: boolean;
+            addedBy: components["schemas"]["PersonDto"];
+            /** Format: date-time */
+            addedAt: string;
+            /** @description WholeSummary of the anthropometry library; for owner and designer */
+            summary?: {
+                [key: string]: unknown;
+            };
+        };
+        StudyProgressDto: {
+            /** @description parts that the people are split into */
+            blocks: number;
+            /** @description parts that are counted */
+            done: number;
+        };
+        ToldPopulationDto: {
+            id: string;
+            name: string;
+            /** @enum {string} */
+            kind: "survey" | "generated" | "estimated" | "own";
+            source: string;
+            licence: string;
+            /** @description to be said wherever a share is shown */
+            cautions: string[];
+        };
+        ListedStudyDto: {
+            /** Format: uuid */
+            id: string;
+            /** @enum {string} */
+            state: "queued" | "running" | "done" | "cancelled" | "failed";
+            progress: components["schemas"]["StudyProgressDto"];
+            /** @description of the document; either this or `revisionLetter` */
+            draftNumber?: number;
+            revisionLetter?: string;
+            population: components["schemas"]["ToldPopulationDto"];
+            /** @description women of 100 people; absent for a population of one sex */
+            womenPercent?: number;
+            people: number;
+            seed: number;
+            /** @description absent: all */
+            ruleIds?: string[];
+            /** @description absent: all */
+            placeIds?: string[];
+            ruleVersion: string;
+            startedBy: components["schemas"]["PersonDto"];
+            /** Format: date-time */
+            startedAt: string;
+            /** Format: date-time */
+            endedAt?: string;
+            /** @description why it failed */
+            fault?: string;
+            /** @description ShareOutcome of the anthropometry library: all ticked rules at all ticked places */
+            outcome?: {
+                [key: string]: unknown;
+            };
+        };
+        StudyListDto: {
+            /** @description the last 20, newest first */
+            items: components["schemas"]["ListedStudyDto"][];
+        };
+        StartStudyDto: {
+            /** @description one that comes with the product, as `us-civilians-2015`, or one of the workshop’s own */
+            populationId: string;
+            /** @description women of 100 people; 50 when absent, or all or none in a population of one sex */
+            womenPercent?: number;
+            people: number;
+            /**
+             * @description another seed draws other people
+             * @default 1
+             */
+            seed: number;
+            /** @description rules that count for "all at once"; all when absent */
+            ruleIds?: string[];
+            /** @description `pieceId:place` of places that count; all when absent */
+            placeIds?: string[];
+            /** @description the draft that was seen; either this or `revisionLetter` */
+            draftNumber?: number;
+            /** @description an issued revision */
+            revisionLetter?: string;
+        };
+        StudyDto: {
+            /** Format: uuid */
+            id: string;
+            /** @enum {string} */
+            state: "queued" | "running" | "done" | "cancelled" | "failed";
+            progress: components["schemas"]["StudyProgressDto"];
+            /** @description of the document; either this or `revisionLetter` */
+            draftNumber?: number;
+            revisionLetter?: string;
+            population: components["schemas"]["ToldPopulationDto"];
+            /** @description women of 100 people; absent for a population of one sex */
+            womenPercent?: number;
+            people: number;
+            seed: number;
+            /** @description absent: all */
+            ruleIds?: string[];
+            /** @description absent: all */
+            placeIds?: string[];
+            ruleVersion: string;
+            startedBy: components["schemas"]["PersonDto"];
+            /** Format: date-time */
+            startedAt: string;
+            /** Format: date-time */
+            endedAt?: string;
+            /** @description why it failed */
+            fault?: string;
+            /** @description ShareOutcome of the anthropometry library: all ticked rules at all ticked places */
+            outcome?: {
+                [key: string]: unknown;
+            };
+            /** @description StudyShares of the anthropometry library; when done */
+            result?: {
+                [key: string]: unknown;
+            };
         };
         UpholstererDto: {
             /** Format: uuid */
@@ -4738,6 +5109,406 @@ export interface operations {
                 content: {
                     "application/json": components["schemas"]["BuiltPartsDto"];
                 };
+            };
+            /** @description what went wrong (RFC 9457) */
+            default: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemBody"];
+                };
+            };
+        };
+    };
+    Populations_list: {
+        parameters: {
+            query?: {
+                page?: unknown;
+                pageSize?: unknown;
+                sort?: string;
+                order?: "asc" | "desc";
+                search?: string;
+            };
+            header?: never;
+            path: {
+                workshopId: unknown;
+            };
+            cookie?: never;
+        };
+        requestBody?: never;
+        responses: {
+            200: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["PopulationPage"];
+                };
+            };
+            /** @description what went wrong (RFC 9457) */
+            default: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemBody"];
+                };
+            };
+        };
+    };
+    Populations_create: {
+        parameters: {
+            query?: never;
+            header?: never;
+            path: {
+                workshopId: unknown;
+            };
+            cookie?: never;
+        };
+        requestBody: {
+            content: {
+                "application/json": components["schemas"]["CreatePopulationDto"];
+            };
+        };
+        responses: {
+            201: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["PopulationDetailsDto"];
+                };
+            };
+            /** @description what went wrong (RFC 9457) */
+            default: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemBody"];
+                };
+            };
+        };
+    };
+    Populations_preview: {
+        parameters: {
+            query?: never;
+            header?: never;
+            path: {
+                workshopId: unknown;
+            };
+            cookie?: never;
+        };
+        requestBody: {
+            content: {
+                "application/json": components["schemas"]["PreviewPopulationDto"];
+            };
+        };
+        responses: {
+            200: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["PopulationPreviewDto"];
+                };
+            };
+            /** @description what went wrong (RFC 9457) */
+            default: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemBody"];
+                };
+            };
+        };
+    };
+    Populations_get: {
+        parameters: {
+            query?: never;
+            header?: never;
+            path: {
+                populationId: string;
+                workshopId: unknown;
+            };
+            cookie?: never;
+        };
+        requestBody?: never;
+        responses: {
+            200: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["PopulationDetailsDto"];
+                };
+            };
+            /** @description what went wrong (RFC 9457) */
+            default: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemBody"];
+                };
+            };
+        };
+    };
+    Populations_remove: {
+        parameters: {
+            query?: never;
+            header?: never;
+            path: {
+                populationId: string;
+                workshopId: unknown;
+            };
+            cookie?: never;
+        };
+        requestBody?: never;
+        responses: {
+            204: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content?: never;
+            };
+            /** @description what went wrong (RFC 9457) */
+            default: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemBody"];
+                };
+            };
+        };
+    };
+    Populations_rows: {
+        parameters: {
+            query?: never;
+            header?: never;
+            path: {
+                populationId: string;
+                workshopId: unknown;
+            };
+            cookie?: never;
+        };
+        requestBody?: never;
+        responses: {
+            /** @description the rows, where they were kept */
+            200: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "text/csv": string;
+                };
+            };
+            /** @description what went wrong (RFC 9457) */
+            default: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemBody"];
+                };
+            };
+        };
+    };
+    Populations_forgetRows: {
+        parameters: {
+            query?: never;
+            header?: never;
+            path: {
+                populationId: string;
+                workshopId: unknown;
+            };
+            cookie?: never;
+        };
+        requestBody?: never;
+        responses: {
+            /** @description only the statistics are left */
+            204: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content?: never;
+            };
+            /** @description what went wrong (RFC 9457) */
+            default: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemBody"];
+                };
+            };
+        };
+    };
+    Studies_list: {
+        parameters: {
+            query?: never;
+            header?: never;
+            path: {
+                productionId: string;
+                setId: string;
+            };
+            cookie?: never;
+        };
+        requestBody?: never;
+        responses: {
+            200: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["StudyListDto"];
+                };
+            };
+            /** @description what went wrong (RFC 9457) */
+            default: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemBody"];
+                };
+            };
+        };
+    };
+    Studies_start: {
+        parameters: {
+            query?: never;
+            header?: never;
+            path: {
+                productionId: string;
+                setId: string;
+            };
+            cookie?: never;
+        };
+        requestBody: {
+            content: {
+                "application/json": components["schemas"]["StartStudyDto"];
+            };
+        };
+        responses: {
+            201: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["StudyDto"];
+                };
+            };
+            /** @description the draft moved on, or too many studies are not done yet */
+            409: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content?: never;
+            };
+            /** @description what went wrong (RFC 9457) */
+            default: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemBody"];
+                };
+            };
+        };
+    };
+    Studies_get: {
+        parameters: {
+            query?: never;
+            header?: never;
+            path: {
+                productionId: string;
+                setId: string;
+                studyId: string;
+            };
+            cookie?: never;
+        };
+        requestBody?: never;
+        responses: {
+            200: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["StudyDto"];
+                };
+            };
+            /** @description what went wrong (RFC 9457) */
+            default: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemBody"];
+                };
+            };
+        };
+    };
+    Studies_remove: {
+        parameters: {
+            query?: never;
+            header?: never;
+            path: {
+                productionId: string;
+                setId: string;
+                studyId: string;
+            };
+            cookie?: never;
+        };
+        requestBody?: never;
+        responses: {
+            204: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content?: never;
+            };
+            /** @description what went wrong (RFC 9457) */
+            default: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemBody"];
+                };
+            };
+        };
+    };
+    Studies_cancel: {
+        parameters: {
+            query?: never;
+            header?: never;
+            path: {
+                productionId: string;
+                setId: string;
+                studyId: string;
+            };
+            cookie?: never;
+        };
+        requestBody?: never;
+        responses: {
+            200: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["StudyDto"];
+                };
+            };
+            /** @description it has ended already */
+            409: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content?: never;
             };
             /** @description what went wrong (RFC 9457) */
             default: {

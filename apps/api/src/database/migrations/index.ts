@@ -5,6 +5,7 @@ import { CushionOrders1796142000000 } from './1796142000000-cushion-orders';
 import { UpholstererOfMessages1796144400000 } from './1796144400000-upholsterer-of-messages';
 import { ConfidenceOfAWorkshop1796157600000 } from './1796157600000-confidence-of-a-workshop';
 import { ErasedNames1796158800000 } from './1796158800000-erased-names';
+import { PopulationsAndStudies1796161490650 } from './1796161490650-populations-and-studies';
 
 /** In the order in which they run. What is merged is never changed. */
 export const MIGRATIONS: (new () => MigrationInterface)[] = [
@@ -14,4 +15,5 @@ export const MIGRATIONS: (new () => MigrationInterface)[] = [
   UpholstererOfMessages1796144400000,
   ConfidenceOfAWorkshop1796157600000,
   ErasedNames1796158800000,
+  PopulationsAndStudies1796161490650,
 ];

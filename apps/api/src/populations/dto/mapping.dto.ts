@@ -1,0 +1,98 @@
+import { MEASURE_KEYS, type MeasureKey } from '@settlewright/anthropometry';
+import { ApiProperty, ApiPropertyOptional } from '@nestjs/swagger';
+import { Type } from 'class-transformer';
+import {
+  ArrayMaxSize,
+  IsArray,
+  IsBoolean,
+  IsIn,
+  IsOptional,
+  IsString,
+  MaxLength,
+  ValidateNested,
+} from 'class-validator';
+import { ALL_UNITS, type Mapping, type SurveyUnit } from '../survey/mapping';
+
+const HEADING_MAX = 400;
+const WORDS_MAX = 20;
+
+export class SexColumnDto {
+  @ApiProperty({ maxLength: HEADING_MAX, description: 'heading of the column' })
+  @IsString()
+  @MaxLength(HEADING_MAX)
+  column: string;
+
+  @ApiPropertyOptional({
+    type: [String],
+    description: 'what stands for a woman; else f, w, female, woman, women',
+  })
+  @IsOptional()
+  @IsArray()
+  @ArrayMaxSize(WORDS_MAX)
+  @IsString({ each: true })
+  @MaxLength(HEADING_MAX, { each: true })
+  women?: string[];
+
+  @ApiPropertyOptional({ type: [String], description: 'what stands for a man; else m, male, man, men' })
+  @IsOptional()
+  @IsArray()
+  @ArrayMaxSize(WORDS_MAX)
+  @IsString({ each: true })
+  @MaxLength(HEADING_MAX, { each: true })
+  men?: string[];
+}
+
+export class MeasureColumnDto {
+  @ApiProperty({ enum: MEASURE_KEYS, enumName: 'MeasureKey' })
+  @IsIn(MEASURE_KEYS)
+  key: MeasureKey;
+
+  @ApiProperty({ maxLength: HEADING_MAX, description: 'heading of the column' })
+  @IsString()
+  @MaxLength(HEADING_MAX)
+  column: string;
+
+  @ApiProperty({
+    enum: ALL_UNITS,
+    description: '`kg`, `0.1kg` and `lb` for the weight, the others for lengths',
+  })
+  @IsIn(ALL_UNITS)
+  unit: SurveyUnit;
+}
+
+/** Which column holds what. */
+export class MappingDto implements Mapping {
+  @ApiProperty({ type: SexColumnDto })
+  @ValidateNested()
+  @Type(() => SexColumnDto)
+  sex: SexColumnDto;
+
+  @ApiPropertyOptional({ maxLength: HEADING_MAX, description: 'heading of the column with years of age' })
+  @IsOptional()
+  @IsString()
+  @MaxLength(HEADING_MAX)
+  age?: string;
+
+  @ApiProperty({ type: [MeasureColumnDto], description: 'stature and weight_kg among them' })
+  @IsArray()
+  @ArrayMaxSize(MEASURE_KEYS.length)
+  @ValidateNested({ each: true })
+  @Type(() => MeasureColumnDto)
+  measures: MeasureColumnDto[];
+
+  @ApiProperty({ description: 'a comma stands before the decimals' })
+  @IsBoolean()
+  decimalComma: boolean;
+}
+
+/** What the columns seem to hold; what could not be guessed is absent. */
+export class SuggestedMappingDto {
+  @ApiPropertyOptional({ type: SexColumnDto })
+  sex?: SexColumnDto;
+  @ApiPropertyOptional()
+  age?: string;
+  @ApiProperty({ type: [MeasureColumnDto] })
+  measures: MeasureColumnDto[];
+  @ApiProperty()
+  decimalComma: boolean;
+}

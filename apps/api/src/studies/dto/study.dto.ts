@@ -1,0 +1,110 @@
+import type { PopulationKind, ShareOutcome } from '@settlewright/anthropometry';
+import { ApiProperty, ApiPropertyOptional } from '@nestjs/swagger';
+import { PersonDto } from '../../sets/dto/person.dto';
+import { STUDY_STATES, type Study, type StudyState } from '../entities/study.entity';
+import type { StudyResult } from '../study-question';
+
+export class ToldPopulationDto {
+  @ApiProperty()
+  id: string;
+  @ApiProperty()
+  name: string;
+  @ApiProperty({ enum: ['survey', 'generated', 'estimated', 'own'] })
+  kind: PopulationKind;
+  @ApiProperty()
+  source: string;
+  @ApiProperty()
+  licence: string;
+  @ApiProperty({ type: [String], description: 'to be said wherever a share is shown' })
+  cautions: string[];
+}
+
+export class StudyProgressDto {
+  @ApiProperty({ description: 'parts that the people are split into' })
+  blocks: number;
+  @ApiProperty({ description: 'parts that are counted' })
+  done: number;
+}
+
+export class ListedStudyDto {
+  @ApiProperty({ format: 'uuid' })
+  id: string;
+  @ApiProperty({ enum: STUDY_STATES })
+  state: StudyState;
+  @ApiProperty({ type: StudyProgressDto })
+  progress: StudyProgressDto;
+  @ApiPropertyOptional({ description: 'of the document; either this or `revisionLetter`' })
+  draftNumber?: number;
+  @ApiPropertyOptional()
+  revisionLetter?: string;
+  @ApiProperty({ type: ToldPopulationDto })
+  population: ToldPopulationDto;
+  @ApiPropertyOptional({ description: 'women of 100 people; absent for a population of one sex' })
+  womenPercent?: number;
+  @ApiProperty()
+  people: number;
+  @ApiProperty()
+  seed: number;
+  @ApiPropertyOptional({ type: [String], description: 'absent: all' })
+  ruleIds?: string[];
+  @ApiPropertyOptional({ type: [String], description: 'absent: all' })
+  placeIds?: string[];
+  @ApiProperty()
+  ruleVersion: string;
+  @ApiProperty({ type: PersonDto })
+  startedBy: PersonDto;
+  @ApiProperty({ format: 'date-time' })
+  startedAt: string;
+  @ApiPropertyOptional({ format: 'date-time' })
+  endedAt?: string;
+  @ApiPropertyOptional({ description: 'why it failed' })
+  fault?: string;
+  @ApiPropertyOptional({
+    type: 'object',
+    additionalProperties: true,
+    description: 'ShareOutcome of the anthropometry library: all ticked rules at all ticked places',
+  })
+  outcome?: ShareOutcome;
+
+  static of(study: Study): ListedStudyDto {
+    const { id, state, draftNumber, revisionLetter, womenPercent, ruleIds, placeIds, fault, outcome } = study;
+    const { population, people, seed, ruleVersion, endedAt } = study;
+    return {
+      id,
+      state,
+      progress: { blocks: study.blocks, done: study.blocksDone },
+      ...(draftNumber === null ? {} : { draftNumber }),
+      ...(revisionLetter === null ? {} : { revisionLetter }),
+      population,
+      ...(womenPercent === null ? {} : { womenPercent }),
+      people,
+      seed,
+      ...(ruleIds ? { ruleIds } : {}),
+      ...(placeIds ? { placeIds } : {}),
+      ruleVersion,
+      startedBy: PersonDto.of(study.startedById, study.startedBy),
+      startedAt: study.startedAt.toISOString(),
+      ...(endedAt ? { endedAt: endedAt.toISOString() } : {}),
+      ...(fault === null ? {} : { fault }),
+      ...(outcome ? { outcome } : {}),
+    };
+  }
+}
+
+export class StudyDto extends ListedStudyDto {
+  @ApiPropertyOptional({
+    type: 'object',
+    additionalProperties: true,
+    description: 'StudyShares of the anthropometry library; when done',
+  })
+  result?: StudyResult;
+
+  static override of(study: Study): StudyDto {
+    return { ...ListedStudyDto.of(study), ...(study.result ? { result: study.result } : {}) };
+  }
+}
+
+export class StudyListDto {
+  @ApiProperty({ type: [ListedStudyDto], description: 'the last 20, newest first' })
+  items: ListedStudyDto[];
+}

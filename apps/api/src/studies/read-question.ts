@@ -1,0 +1,78 @@
+import { PERSON_CHECKS, type PlaceSituation } from '@settlewright/anthropometry';
+import { measureSet, type SetDocument } from '@settlewright/geometry';
+import { Problem, type ProblemField } from '../common/problem';
+import { crowdFrom, type CrowdData } from '../populations/crowd';
+import type { StartStudyDto } from './dto/start-study.dto';
+import type { StudyQuestion } from './study-question';
+
+const WHOLE = 100;
+const EVENLY = 50;
+
+/** What is to be counted, or everything in the request that keeps it from being counted. */
+export function readQuestion(
+  dto: StartStudyDto,
+  document: SetDocument,
+  crowd: CrowdData,
+  blockPeople: number,
+): StudyQuestion {
+  const { places } = measureSet(document);
+  const groups = crowdFrom(crowd).population.groups.map(({ group }) => group);
+  const faults = [
+    ...placeFaults(dto.placeIds, places),
+    ...strangers('ruleIds', dto.ruleIds, [...RULES], 'no rule asked of one sitter has the id'),
+    ...mixFaults(dto.womenPercent, groups),
+  ];
+  if (faults.length > 0) throw Problem.invalid(faults);
+  const { people, seed = 1, ruleIds, placeIds } = dto;
+  const { lensHeightMm } = document.asked;
+  return {
+    crowd,
+    ...(groups.length > 1 ? { womenShare: (dto.womenPercent ?? EVENLY) / WHOLE } : {}),
+    people,
+    seed,
+    blockPeople,
+    places,
+    ...(lensHeightMm === undefined ? {} : { lensHeightMm }),
+    ticked: { ...(ruleIds ? { ruleIds } : {}), ...(placeIds ? { placeIds } : {}) },
+  };
+}
+
+const RULES = PERSON_CHECKS.map(({ id }) => id);
+
+function placeFaults(asked: string[] | undefined, places: PlaceSituation[]): ProblemField[] {
+  if (places.length === 0) {
+    const message = 'the set has no place to sit at; accepted: a set with a bench or a loose seat';
+    return [{ path: 'placeIds', code: 'no-places', message }];
+  }
+  const ids = places.map(({ placeId }) => placeId);
+  return strangers('placeIds', asked, ids, 'no place of the set has the id');
+}
+
+function strangers(
+  path: string,
+  asked: string[] | undefined,
+  known: string[],
+  words: string,
+): ProblemField[] {
+  return (asked ?? []).flatMap((id, at) =>
+    known.includes(id)
+      ? []
+      : [
+          {
+            path: `${path}.${at}`,
+            code: 'unknown',
+            message: `${words} "${id}"; accepted: ${known.slice(0, 60).join(', ')}`,
+          },
+        ],
+  );
+}
+
+/** A population of one sex is not mixed. */
+function mixFaults(womenPercent: number | undefined, groups: readonly string[]): ProblemField[] {
+  const [only, other] = groups;
+  if (womenPercent === undefined || other !== undefined) return [];
+  const accepted = only === 'women' ? WHOLE : 0;
+  if (womenPercent === accepted) return [];
+  const message = `read ${womenPercent}; the population holds ${only} only; accepted: ${accepted}, or leave it out`;
+  return [{ path: 'womenPercent', code: 'one-sex', message }];
+}

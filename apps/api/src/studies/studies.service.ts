@@ -1,0 +1,205 @@
+import type { SetDocument } from '@settlewright/geometry';
+import { Injectable } from '@nestjs/common';
+import { InjectRepository } from '@nestjs/typeorm';
+import { type EntityManager, In, type Repository, type SelectQueryBuilder } from 'typeorm';
+import { AuditService } from '../audit/audit.service';
+import type { MemberInfo } from '../common/access.decorator';
+import { Problem } from '../common/problem';
+import { InjectSettings, type Settings } from '../config/settings';
+import { crowdFrom } from '../populations/crowd';
+import { PopulationsService } from '../populations/populations.service';
+import { DraftsService } from '../sets/drafts.service';
+import { RevisionsService } from '../sets/revisions.service';
+import { SetAccess } from '../sets/set-access';
+import { resultOf } from './count-block';
+import type { StartStudyDto } from './dto/start-study.dto';
+import { Study, UNFINISHED } from './entities/study.entity';
+import { readQuestion } from './read-question';
+import { locked, StudyBlocks } from './study-blocks.service';
+import { StudyCounter } from './study-counter';
+import { blocksOf, type StudyQuestion } from './study-question';
+import { StudyQueue } from './study-queue';
+
+const LISTED = 20;
+/** So that one workshop does not keep the others waiting. */
+const MOST_UNFINISHED = 5;
+
+/** Drawing a person, and asking all rules of one at one place: milliseconds, on a slow machine. */
+const MS_PER_PERSON = 0.005;
+const MS_PER_SEAT = 0.0008;
+
+const estimatedMs = ({ people, places }: StudyQuestion): number =>
+  people * (MS_PER_PERSON + MS_PER_SEAT * places.length);
+
+@Injectable()
+export class StudiesService {
+  constructor(
+    @InjectRepository(Study) private readonly studies: Repository<Study>,
+    @InjectSettings() private readonly config: Settings,
+    private readonly access: SetAccess,
+    private readonly drafts: DraftsService,
+    private readonly revisions: RevisionsService,
+    private readonly populations: PopulationsService,
+    private readonly counter: StudyCounter,
+    private readonly blocks: StudyBlocks,
+    private readonly queue: StudyQueue,
+    private readonly audit: AuditService,
+  ) {}
+
+  /** A short study is counted here and now, a long one by the workers. */
+  async start(member: MemberInfo, productionId: string, setId: string, dto: StartStudyDto): Promise<Study> {
+    await this.access.forChanging(member, productionId, setId);
+    const document = await this.document(member, productionId, setId, dto);
+    const crowd = await this.populations.crowd(member.workshopId, dto.populationId);
+    const question = readQuestion(dto, document, crowd, this.config.studyBlockPeople);
+    const study = this.begun(member, setId, dto, question);
+    const atOnce = study.blocks === 1 && estimatedMs(question) <= this.config.studyAtOnceMs;
+    const id = atOnce
+      ? await this.countNow(member, study, question)
+      : await this.enqueue(member, study, question);
+    return this.find(member, productionId, setId, id);
+  }
+
+  async list(member: MemberInfo, productionId: string, setId: string): Promise<Study[]> {
+    await this.access.forReading(member, productionId, setId);
+    return this.shown(['question', 'result'])
+      .where('study.setId = :setId', { setId })
+      .orderBy('study.startedAt', 'DESC')
+      .addOrderBy('study.id')
+      .take(LISTED)
+      .getMany();
+  }
+
+  async find(member: MemberInfo, productionId: string, setId: string, id: string): Promise<Study> {
+    await this.access.forReading(member, productionId, setId);
+    const study = await this.shown(['question'])
+      .where('study.id = :id AND study.setId = :setId', { id, setId })
+      .getOne();
+    if (!study) throw Problem.notFound('study');
+    return study;
+  }
+
+  async cancel(member: MemberInfo, productionId: string, setId: string, id: string): Promise<Study> {
+    await this.find(member, productionId, setId, id);
+    await this.studies.manager.transaction(async (manager) => {
+      const study = await locked(manager, id);
+      if (!study) throw Problem.notFound('study');
+      if (study.state === 'cancelled') return;
+      if (!UNFINISHED.includes(study.state)) {
+        const detail = `This study is ${study.state}; accepted: one that is queued or running.`;
+        throw Problem.conflict('study-ended', detail, { state: study.state });
+      }
+      await this.blocks.end(manager, id, { state: 'cancelled' });
+      await this.record(manager, member, 'study.cancelled', id);
+    });
+    return this.find(member, productionId, setId, id);
+  }
+
+  /** What is not counted yet is not counted any more. */
+  async remove(member: MemberInfo, productionId: string, setId: string, id: string): Promise<void> {
+    await this.find(member, productionId, setId, id);
+    await this.studies.manager.transaction(async (manager) => {
+      await manager.delete(Study, { id });
+      await this.record(manager, member, 'study.removed', id);
+    });
+  }
+
+  private async document(
+    member: MemberInfo,
+    productionId: string,
+    setId: string,
+    { draftNumber, revisionLetter }: StartStudyDto,
+  ): Promise<SetDocument> {
+    if ((draftNumber === undefined) === (revisionLetter === undefined)) {
+      const read = draftNumber === undefined ? 'neither' : 'both';
+      const message = `read ${read}; accepted: the number of the draft or the letter of a revision`;
+      throw Problem.invalid([{ path: 'draftNumber', code: 'one-document', message }]);
+    }
+    if (revisionLetter !== undefined) {
+      return (await this.revisions.find(member, productionId, setId, revisionLetter)).document;
+    }
+    const draft = await this.drafts.get(member, productionId, setId);
+    if (draft.number !== draftNumber) {
+      const detail = `Draft ${draftNumber} was to be studied, but the set is at draft ${draft.number}.`;
+      throw Problem.conflict('draft-moved-on', detail, { currentNumber: draft.number });
+    }
+    return draft.document;
+  }
+
+  private begun(member: MemberInfo, setId: string, dto: StartStudyDto, question: StudyQuestion): Study {
+    const { population } = crowdFrom(question.crowd);
+    const { name, kind, source, licence, cautions } = population;
+    const { womenShare, people, seed } = question;
+    return this.studies.create({
+      setId,
+      draftNumber: dto.draftNumber ?? null,
+      revisionLetter: dto.revisionLetter?.toUpperCase() ?? null,
+      population: { id: question.crowd.id, name, kind, source, licence, cautions: [...cautions] },
+      womenPercent: womenShare === undefined ? null : (dto.womenPercent ?? womenShare * 100),
+      people,
+      seed,
+      ruleIds: dto.ruleIds ?? null,
+      placeIds: dto.placeIds ?? null,
+      ruleVersion: this.counter.ruleBook.version,
+      state: 'queued',
+      blocks: blocksOf(question),
+      blocksDone: 0,
+      question,
+      result: null,
+      outcome: null,
+      fault: null,
+      startedById: member.userId,
+      endedAt: null,
+    });
+  }
+
+  private async countNow(member: MemberInfo, study: Study, question: StudyQuestion): Promise<string> {
+    const result = resultOf([this.counter.count(question, 0)], this.counter.crowdOf(question));
+    const done = { state: 'done', blocksDone: 1, question: null, result, outcome: result.all } as const;
+    return this.studies.manager.transaction(async (manager) => {
+      const { id } = await manager.save(Object.assign(study, done, { endedAt: new Date() }));
+      await this.record(manager, member, 'study.started', id);
+      return id;
+    });
+  }
+
+  private async enqueue(member: MemberInfo, study: Study, question: StudyQuestion): Promise<string> {
+    const unfinished = await this.studies
+      .createQueryBuilder('study')
+      .innerJoin('study.set', 'set')
+      .innerJoin('set.production', 'production')
+      .where('production.workshopId = :workshopId', { workshopId: member.workshopId })
+      .andWhere({ state: In([...UNFINISHED]) })
+      .getCount();
+    if (unfinished >= MOST_UNFINISHED) {
+      const detail = `${unfinished} studies of this workshop are not done yet; accepted: up to ${MOST_UNFINISHED} at a time.`;
+      throw Problem.conflict('too-many-studies', detail);
+    }
+    return this.studies.manager.transaction(async (manager) => {
+      const { id, blocks } = await manager.save(study);
+      await this.queue.add(manager, id, blocks);
+      await this.record(manager, member, 'study.started', id, { people: question.people });
+      return id;
+    });
+  }
+
+  private shown(without: (keyof Study)[]): SelectQueryBuilder<Study> {
+    const columns = this.studies.metadata.columns.map(({ propertyName }) => propertyName as keyof Study);
+    return this.studies
+      .createQueryBuilder('study')
+      .select(columns.filter((column) => !without.includes(column)).map((column) => `study.${column}`))
+      .leftJoin('study.startedBy', 'starter')
+      .addSelect(['starter.id', 'starter.name']);
+  }
+
+  private record(
+    manager: EntityManager,
+    { workshopId, userId }: MemberInfo,
+    action: string,
+    subjectId: string,
+    detail?: Record<string, unknown>,
+  ): Promise<void> {
+    const subject = { subjectType: 'study', subjectId, ...(detail ? { detail } : {}) };
+    return this.audit.record(manager, { workshopId, userId, action, ...subject });
+  }
+}

@@ -1,0 +1,23 @@
+import { Module } from '@nestjs/common';
+import { ConfigModule, type ConfigType } from '@nestjs/config';
+import { LoggerModule } from 'nestjs-pino';
+import { logParameters } from './common/request-log';
+import { settings, workerSettings } from './config/settings';
+import { DatabaseModule } from './database/database.module';
+import { StudyCountingModule } from './studies/study-counting.module';
+import { StudyWorker } from './studies/study-worker';
+
+/** A process that counts studies and answers no requests. */
+@Module({
+  imports: [
+    ConfigModule.forRoot({ isGlobal: true, ignoreEnvFile: true, load: [workerSettings] }),
+    LoggerModule.forRootAsync({
+      inject: [settings.KEY],
+      useFactory: (config: ConfigType<typeof settings>) => logParameters(config.logLevel),
+    }),
+    DatabaseModule,
+    StudyCountingModule,
+  ],
+  providers: [StudyWorker],
+})
+export class WorkerModule {}
