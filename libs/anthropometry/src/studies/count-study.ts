@@ -1,5 +1,5 @@
 import type { MeasureKey } from '../measures/measures.ts';
-import { together, type CompiledCheck, type CompiledPlace, type Demand } from './compile.ts';
+import type { CompiledCheck, Demand } from './compile.ts';
 import {
   GROUPS,
   tallyOf,
@@ -9,25 +9,17 @@ import {
   type Group,
   type PartialStudy,
 } from './counts.ts';
-import type { Crowd } from './crowd.ts';
-import type { PeopleSet, PeopleSets } from './people-sets.ts';
-
-/** People of one sex and what is asked of them. */
-export interface GroupStudy {
-  crowd: Crowd;
-  sets: PeopleSets;
-  places: readonly CompiledPlace[];
-}
-
-export type GroupStudies = Record<Group, GroupStudy>;
-
-/** What counts for "all at once". */
-export interface Ticks {
-  rule: (ruleId: string) => boolean;
-  place: (placeId: string) => boolean;
-}
-
-type Demands = Record<Group, Pick<CompiledCheck, 'fits' | 'atLeastTight'>>;
+import {
+  bothSexes,
+  byRule,
+  demandOf,
+  joined,
+  type Demands,
+  type GroupStudies,
+  type GroupStudy,
+  type Ticks,
+} from './demands.ts';
+import type { PeopleSet } from './people-sets.ts';
 
 /** A rule at all ticked places. */
 interface Everywhere extends FitTally {
@@ -133,36 +125,6 @@ function everywhere(studies: GroupStudies, ticks: Ticks): Everywhere[] {
       ...counted(studies, demands),
     };
   });
-}
-
-/** What each ticked rule says at ticked places, where it says something. */
-function byRule({ places }: GroupStudy, ticks: Ticks): Map<string, CompiledCheck[]> {
-  const rules = new Map<string, CompiledCheck[]>();
-  for (const { placeId, checks } of places) {
-    if (!ticks.place(placeId)) continue;
-    for (const check of checks) {
-      if (check.silent !== undefined || !ticks.rule(check.ruleId)) continue;
-      const list = rules.get(check.ruleId);
-      if (list) list.push(check);
-      else rules.set(check.ruleId, [check]);
-    }
-  }
-  return rules;
-}
-
-/** Everything ticked as one demand on each sex. */
-const joined = (studies: GroupStudies, ticks: Ticks): Demands =>
-  bothSexes(studies, (group) => demandOf([...byRule(studies[group], ticks).values()].flat()));
-
-const demandOf = (checks: readonly CompiledCheck[]): Demands[Group] => ({
-  fits: together(checks.map(({ fits }) => fits)),
-  atLeastTight: together(checks.map(({ atLeastTight }) => atLeastTight)),
-});
-
-/** Asks once where both sexes wear the same. */
-function bothSexes(studies: GroupStudies, ask: (group: Group) => Demands[Group]): Demands {
-  const women = ask('women');
-  return { women, men: studies.men.places === studies.women.places ? women : ask('men') };
 }
 
 function counted(studies: GroupStudies, demands: Demands): FitTally {

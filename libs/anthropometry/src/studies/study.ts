@@ -2,16 +2,10 @@ import type { RuleBook } from '../checks/rule-book.ts';
 import type { PlaceSituation } from '../checks/situation.ts';
 import type { Draws } from '../populations/population.ts';
 import { compilePlace, type CompiledPlace } from './compile.ts';
-import {
-  countAll,
-  countStudy,
-  countTicked,
-  type GroupStudies,
-  type GroupStudy,
-  type Ticks,
-} from './count-study.ts';
+import { countAll, countStudy, countTicked } from './count-study.ts';
 import { mergePartials, type FitTally, type Group, type PartialStudy } from './counts.ts';
 import { createCrowd } from './crowd.ts';
+import type { GroupStudies, GroupStudy, Ticks } from './demands.ts';
 import { createPeopleSets } from './people-sets.ts';
 import { sharesOf, type ShareSetup, type StudyShares } from './shares.ts';
 import type { Wear } from './symbols.ts';
