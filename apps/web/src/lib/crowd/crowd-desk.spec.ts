@@ -1,0 +1,74 @@
+import type { PlaceSituation } from '@settlewright/anthropometry';
+import { ARRANGEMENTS, dimensionOf, measureSet, type SetDocument } from '@settlewright/geometry';
+import { describe, expect, it } from 'vitest';
+import { createCrowdDesk } from './crowd-desk.ts';
+import { CROWDS, DEFAULT_CROWD, crowdWords } from './crowds.ts';
+import { peopleOf } from './crowd-people.ts';
+
+const bay = ARRANGEMENTS.find(({ id }) => id === 'facing-benches')?.build() as SetDocument;
+const height = dimensionOf(bay, 'seat-height');
+const placesAt = (value: number): PlaceSituation[] =>
+  measureSet(height?.at(value) as SetDocument).places.slice(0, 1);
+
+const ask = (women: number) => ({
+  crowd: { ...DEFAULT_CROWD, women },
+  count: 4000,
+  ticked: { ruleIds: ['SEAT-02'] },
+});
+
+describe('a crowd that is asked', () => {
+  const desk = createCrowdDesk();
+
+  it('fits a low seat less and a high one less than one in between, and tells who it is', async () => {
+    const values = [330, 420, 560];
+    const { points, told } = await desk.answer('curve', {
+      ...ask(50),
+      values,
+      placesAt: values.map(placesAt),
+    });
+    const [low, middle, high] = points.map(({ fits }) => fits ?? 0);
+    expect(middle).toBeGreaterThan(low ?? 1);
+    expect(middle).toBeGreaterThan(high ?? 1);
+    expect(points.every(({ fits, atLeastTight }) => (fits ?? 1) <= (atLeastTight ?? 0))).toBe(true);
+    expect(told.cautions.length).toBeGreaterThan(0);
+  });
+
+  it('gives the mix of women and men that was asked for', async () => {
+    const shares = await Promise.all(
+      [0, 50, 100].map(async (women) => {
+        const { all } = await desk.answer('shares', { ...ask(women), places: placesAt(440) });
+        return all.kind === 'shares' ? all.fits.mixed.value : -1;
+      }),
+    );
+    const [men, both, women] = shares as [number, number, number];
+    expect(men).toBeGreaterThan(women);
+    expect(both).toBeCloseTo((men + women) / 2, 1);
+  });
+
+  it('says the same again, whatever was asked between', async () => {
+    const first = await desk.answer('shares', { ...ask(50), places: placesAt(420) });
+    await desk.answer('shares', { ...ask(50), places: placesAt(500) });
+    expect(await desk.answer('shares', { ...ask(50), places: placesAt(420) })).toEqual(first);
+  });
+
+  it('agrees with the curve point by point on a map', async () => {
+    const [across, up] = [[400, 440], [1]];
+    const map = await desk.answer('map', { ...ask(50), across, up, placesAt: [across.map(placesAt)] });
+    const curve = await desk.answer('curve', { ...ask(50), values: across, placesAt: across.map(placesAt) });
+    expect(map.fits[0]).toEqual(curve.points.map(({ fits }) => fits));
+  });
+
+  it('knows every population in the list by its own name, and no other', async () => {
+    for (const { id } of CROWDS) expect((await peopleOf({ populationId: id, women: 50 })).id).toContain(id);
+    await expect(peopleOf({ populationId: 'giants', women: 50 })).rejects.toThrow('giants');
+  });
+});
+
+describe('words for a crowd', () => {
+  it.each([
+    [50, 'US adults 2015–16, men and women equally'],
+    [0, 'US adults 2015–16, men'],
+    [100, 'US adults 2015–16, women'],
+    [60, 'US adults 2015–16, 60 in 100 women'],
+  ])('%i women', (women, words) => expect(crowdWords({ ...DEFAULT_CROWD, women })).toBe(words));
+});
