@@ -1,6 +1,8 @@
 import {
+  childrenOfMark,
   civilians2015,
   nationalPopulations,
+  readChildren,
   readSurvey,
   soldiers2012,
   type Survey,
@@ -23,12 +25,14 @@ function builtIn(): BuiltIn {
 function readBuiltIn(): BuiltIn {
   const summary = readSeedData('populations/ansur2');
   const soldiers = readSurvey(summary);
+  const children = readChildren(readSeedData('populations/children'));
   const crowds: Crowd[] = [
     { population: soldiers2012(soldiers), surveyed: countedIn(summary as Summary) },
     { population: civilians2015(readSeedData('populations/civilian-2015')) },
     ...nationalPopulations(readSeedData('populations/nations'), soldiers).map((population) => ({
       population,
     })),
+    ...children.marks.map(({ mark }) => ({ population: childrenOfMark(children, mark) })),
   ];
   return { soldiers, crowds: new Map(crowds.map((crowd) => [crowd.population.id, crowd])) };
 }

@@ -1,8 +1,10 @@
 import {
+  childrenOfMark,
   civilians2015,
   mixOf,
   nationalPopulations,
   ownPopulation,
+  readChildren,
   readSurvey,
   soldiers2012,
   type Population,
@@ -36,6 +38,11 @@ async function populationOf({ populationId, own }: CrowdRequest): Promise<Popula
   if (populationId === 'us-civilians-2015') {
     const file = await import('@settlewright/seed-data/populations/civilian-2015.json');
     return civilians2015(file.default);
+  }
+  const mark = /^children-(\d)$/.exec(populationId)?.[1];
+  if (mark) {
+    const file = await import('@settlewright/seed-data/populations/children.json');
+    return childrenOfMark(readChildren(file.default), Number(mark));
   }
   const survey = await readSurveyOfSoldiers();
   if (populationId === 'us-soldiers-2012') return soldiers2012(survey);

@@ -21,6 +21,11 @@ export const CROWDS: readonly CrowdOption[] = [
   { id: 'german', words: 'German adults', kind: 'estimated' },
   { id: 'hong-kong', words: 'Hong Kong adults', kind: 'estimated' },
   { id: 'japanese', words: 'Japanese adults', kind: 'estimated' },
+  ...[1, 2, 3, 4, 5, 6].map((mark) => ({
+    id: `children-${mark}`,
+    words: `Children of size mark ${mark}`,
+    kind: 'estimated, three measures only',
+  })),
 ];
 
 export const DEFAULT_CROWD: CrowdChoice = { populationId: 'us-civilians-2015', women: 50 };
@@ -34,6 +39,7 @@ export function crowdWords(
   options: readonly CrowdOption[] = CROWDS,
 ): string {
   const name = options.find(({ id }) => id === populationId)?.words ?? 'people of your own survey';
+  if (populationId.startsWith('children-')) return `${name}, girls and boys`;
   if (women === 50) return `${name}, men and women equally`;
   if (women === 0) return `${name}, men`;
   if (women === 100) return `${name}, women`;
