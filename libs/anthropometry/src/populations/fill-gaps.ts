@@ -29,7 +29,8 @@ export function fillGaps(reference: Worked, known: Worked): Filled {
   const count = held.length;
   const within = matrixOf(reference.covariance, size);
   const here = matrixOf(known.covariance, count);
-  const own = within.selection(held, held);
+  // Rounding leaves the two halves of a reference of many measures apart in the last digit.
+  const own = symmetric(within.selection(held, held));
   const cholesky = new CholeskyDecomposition(own);
   if (!cholesky.isPositiveDefinite()) {
     throw new Error(
