@@ -45,9 +45,10 @@ const steps = [
   },
 ];
 
-/** Builds what changed since the last build. */
-export function build() {
+/** Builds what changed since the last build; a worker needs no web. */
+export function build({ web = true } = {}) {
   for (const step of steps) {
+    if (step.name === 'web' && !web) continue;
     const stamp = path.join(root, step.product, '.built-from');
     const mark = fingerprint(step.sources);
     if (fs.existsSync(stamp) && fs.readFileSync(stamp, 'utf8') === mark) continue;

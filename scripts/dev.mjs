@@ -16,22 +16,10 @@ const port = await freePort(Number(process.env.PORT ?? 3000));
 const webPort = await freePort(5173);
 const publicUrl = `http://127.0.0.1:${webPort}`;
 const env = apiEnvironment({ databaseUrl: database.url, smtpUrl: mail.smtpUrl, port, publicUrl, demo: true });
-launch(
-  [
-    process.execPath,
-    '--watch',
-    '--watch-preserve-output',
-    '-C',
-    'source',
-    '-r',
-    '@swc-node/register',
-    'src/main.ts',
-  ],
-  {
-    cwd: path.join(root, 'apps/api'),
-    env,
-  },
-);
+const watched = ['--watch', '--watch-preserve-output', '-C', 'source', '-r', '@swc-node/register'];
+for (const entry of ['src/main.ts', 'src/worker.ts']) {
+  launch([process.execPath, ...watched, entry], { cwd: path.join(root, 'apps/api'), env });
+}
 launch([path.join(root, 'node_modules/.bin/vite'), '--host', '127.0.0.1', '--port', String(webPort)], {
   cwd: path.join(root, 'apps/web'),
   env: { ...process.env, PORT: String(port), WEB_PORT: String(webPort) },

@@ -5,6 +5,7 @@ import { root } from './root.mjs';
 
 const setpriv = spawnSync('setpriv', ['--version']).status === 0;
 const children = new Set();
+let stopping = false;
 
 /** Spawns a command that the kernel stops when this process dies. */
 export function launch(command, options = {}) {
@@ -13,6 +14,17 @@ export function launch(command, options = {}) {
   children.add(child);
   child.once('exit', () => children.delete(child));
   return child;
+}
+
+const PAUSE_MS = 1000;
+
+/** As `launch`, and again whenever it ends before everything is stopped. */
+export function keepRunning(name, command, options) {
+  launch(command, options).once('exit', () => {
+    if (stopping) return;
+    console.error(`The ${name} ended; it is started again.`);
+    setTimeout(() => !stopping && keepRunning(name, command, options), PAUSE_MS).unref();
+  });
 }
 
 /** Runs a command and answers its exit code. */
@@ -29,6 +41,7 @@ export function runToEnd(command, options = {}) {
 
 /** Stops every child that still runs. */
 export async function stopChildren() {
+  stopping = true;
   await Promise.all(
     [...children].map(
       (child) =>

@@ -1,9 +1,9 @@
-// The product's processes on this machine: PostgreSQL, the mail stand-in and the API.
+// The product's processes on this machine: PostgreSQL, the mail stand-in, the API and a worker.
 import http from 'node:http';
 import path from 'node:path';
 import { freePort } from './ports.mjs';
 import { startPostgres } from './postgres.mjs';
-import { launch } from './processes.mjs';
+import { keepRunning, launch } from './processes.mjs';
 import { root } from './root.mjs';
 
 /** Starts the mail stand-in and answers where it listens; with SMTP_URL set nothing is started. */
@@ -52,7 +52,14 @@ export async function untilReady(child, address) {
   return false;
 }
 
-/** PostgreSQL, mail stand-in and the built API; `port` 0 takes any free one. */
+/** The built worker, which counts studies. */
+export const workerCommand = [
+  process.execPath,
+  '--enable-source-maps',
+  path.join(root, 'apps/api/dist/worker.js'),
+];
+
+/** PostgreSQL, mail stand-in, the built API and a worker; `port` 0 takes any free one. */
 export async function startProduct({ cluster, port, demo, env = {} }) {
   const database = await startPostgres(cluster);
   const mail = await startMail();
@@ -70,5 +77,6 @@ export async function startProduct({ cluster, port, demo, env = {} }) {
       ...env,
     },
   });
+  keepRunning('worker', workerCommand, { env: { ...process.env, DATABASE_URL: database.url, ...env } });
   return { database, mail, api, address };
 }
