@@ -6,6 +6,7 @@ import { AuditModule } from './audit/audit.module';
 import { AuthModule } from './auth/auth.module';
 import { CastModule } from './cast/cast.module';
 import { CastErasureModule } from './cast/erasure/cast-erasure.module';
+import { MeasuringModule } from './cast/measuring/measuring.module';
 import { logParameters } from './common/request-log';
 import { settings } from './config/settings';
 import { CushionOrdersModule } from './cushion-orders/cushion-orders.module';
@@ -50,6 +51,7 @@ import { WorkshopsModule } from './workshops/workshops.module';
     CushionOrdersModule,
     DemoModule,
     CastErasureModule,
+    MeasuringModule,
     ProductionDuplicationModule,
   ],
 })

@@ -1,9 +1,13 @@
+import { setImmediate } from 'node:timers/promises';
 import {
   type BodyModel,
   checkSet,
+  checkSitter,
   createBodyModel,
   type FitSheet,
   loadRuleBook,
+  type NextMeasures,
+  nextMeasures,
   type RuleBook,
   type Sitter,
 } from '@settlewright/anthropometry';
@@ -16,6 +20,13 @@ import { type RoundedBody, roundedBody } from './rounded-body';
 const ORDINALS = new Intl.PluralRules('en', { type: 'ordinal' });
 const ENDINGS: Partial<Record<Intl.LDMLPluralRule, string>> = { one: 'st', two: 'nd', few: 'rd' };
 const ONE: Record<'women' | 'men', string> = { women: 'Woman', men: 'Man' };
+
+/** Which measurements settle most of what is not known of somebody at a place. */
+export interface SitterNext {
+  castId: string;
+  placeId: string;
+  next: NextMeasures;
+}
 
 /** Makes fit sheets on the server, so that verdicts can be shown to people who may not see measures. */
 @Injectable()
@@ -32,6 +43,31 @@ export class FitCheckService {
       model: this.model,
       settings: { ...document.asked, ...(confidence === null ? {} : { confidence }) },
     });
+  }
+
+  /**
+   * What to measure next of everyone of the cast who sits in the document. Each person takes some tenths of a second,
+   * so others get their turn between two of them.
+   */
+  async *measureNext(
+    document: SetDocument,
+    cast: readonly CastPerson[],
+    confidence: number | null,
+  ): AsyncGenerator<SitterNext> {
+    const { ruleBook, model } = this;
+    const settings = { ...document.asked, ...(confidence === null ? {} : { confidence }) };
+    const input = { situation: measureSet(document), ruleBook, model, settings };
+    for (const sitter of this.sitters(document, cast)) {
+      if (sitter.kind !== 'cast') continue;
+      await setImmediate();
+      const next = nextMeasures({
+        person: sitter.person,
+        model,
+        rowFor: (person) => checkSitter(input, { ...sitter, person }),
+        confidence: confidence ?? ruleBook.confidence,
+      });
+      yield { castId: sitter.id, placeId: sitter.placeId, next };
+    }
   }
 
   /** A body for each taken place, as far as everybody in the workshop may see it. */

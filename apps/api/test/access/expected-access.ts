@@ -58,6 +58,9 @@ export const EXPECTED_ACCESS: Record<string, AccessRule> = {
   [`GET ${P}/cast/{castId}/export`]: MAKERS,
   [`GET ${P}/cast/{castId}/named`]: MAKERS,
   [`GET ${P}/cast.csv`]: MAKERS,
+  [`GET ${P}/cast/measure-next`]: MAKERS,
+  [`GET ${P}/cast/measuring-sheet.pdf`]: MAKERS,
+  [`GET ${S}/draft/measure-next`]: MAKERS,
   [`POST ${P}/cast/import/preview`]: MAKERS,
   [`POST ${P}/cast/import`]: MAKERS,
 

@@ -1189,6 +1189,54 @@ export interface paths {
         patch?: never;
         trace?: never;
     };
+    "/api/workshops/{workshopId}/productions/{productionId}/cast/measure-next": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        get: operations["Measuring_ofProduction"];
+        put?: never;
+        post?: never;
+        delete?: never;
+        options?: never;
+        head?: never;
+        patch?: never;
+        trace?: never;
+    };
+    "/api/workshops/{workshopId}/productions/{productionId}/sets/{setId}/draft/measure-next": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        get: operations["Measuring_ofSet"];
+        put?: never;
+        post?: never;
+        delete?: never;
+        options?: never;
+        head?: never;
+        patch?: never;
+        trace?: never;
+    };
+    "/api/workshops/{workshopId}/productions/{productionId}/cast/measuring-sheet.pdf": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        get: operations["Measuring_sheet"];
+        put?: never;
+        post?: never;
+        delete?: never;
+        options?: never;
+        head?: never;
+        patch?: never;
+        trace?: never;
+    };
     "/api/workshops/{workshopId}/productions/{productionId}/duplicate": {
         parameters: {
             query?: never;
@@ -2788,6 +2836,28 @@ export interface components {
             /** @description a part of the name by itself; stays, as it may be somebody else’s; the first 200 */
             parts: components["schemas"]["NamedPlaceDto"][];
             partCount: number;
+        };
+        NextMeasureDto: {
+            /** @enum {string} */
+            key: "stature" | "weight_kg" | "sitting_height" | "eye_height_sitting" | "acromial_height_sitting" | "elbow_rest_height" | "popliteal_height" | "knee_height_sitting" | "buttock_popliteal_length" | "buttock_knee_length" | "thigh_clearance" | "hip_breadth_sitting" | "bideltoid_breadth" | "forearm_forearm_breadth" | "abdominal_extension_depth_sitting";
+            /** @description how many of the uncertain verdicts it settles on average */
+            settles: number;
+            /** @description rules whose verdict it settles more often than not */
+            ruleIds: string[];
+        };
+        PersonNextDto: {
+            /** Format: uuid */
+            castId: string;
+            /** @description names of the sets that were looked at */
+            sets: string[];
+            /** @description verdicts that are not as sure as the workshop asks */
+            uncertain: number;
+            /** @description in the order to take them; at most two for one set */
+            order: components["schemas"]["NextMeasureDto"][];
+        };
+        MeasureNextDto: {
+            /** @description one entry for everybody of the cast who sits */
+            items: components["schemas"]["PersonNextDto"][];
         };
         ProblemBody: {
             type: string;
@@ -6252,6 +6322,103 @@ export interface operations {
                 };
                 content: {
                     "application/json": components["schemas"]["NamedPlacesDto"];
+                };
+            };
+            /** @description what went wrong (RFC 9457) */
+            default: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemBody"];
+                };
+            };
+        };
+    };
+    Measuring_ofProduction: {
+        parameters: {
+            query?: never;
+            header?: never;
+            path: {
+                productionId: string;
+            };
+            cookie?: never;
+        };
+        requestBody?: never;
+        responses: {
+            /** @description which tape measures settle most, over all sets in use that each person sits in */
+            200: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["MeasureNextDto"];
+                };
+            };
+            /** @description what went wrong (RFC 9457) */
+            default: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemBody"];
+                };
+            };
+        };
+    };
+    Measuring_ofSet: {
+        parameters: {
+            query?: never;
+            header?: never;
+            path: {
+                productionId: string;
+                setId: string;
+            };
+            cookie?: never;
+        };
+        requestBody?: never;
+        responses: {
+            /** @description which tape measures settle most of what the draft’s fit sheet does not know */
+            200: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["MeasureNextDto"];
+                };
+            };
+            /** @description what went wrong (RFC 9457) */
+            default: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemBody"];
+                };
+            };
+        };
+    };
+    Measuring_sheet: {
+        parameters: {
+            query?: {
+                /** @description one person; everybody when left out */
+                person?: string;
+            };
+            header?: never;
+            path: {
+                productionId: string;
+            };
+            cookie?: never;
+        };
+        requestBody?: never;
+        responses: {
+            /** @description a sheet to write measures on, with a drawing of each; two pages a person */
+            200: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/pdf": string;
                 };
             };
             /** @description what went wrong (RFC 9457) */
