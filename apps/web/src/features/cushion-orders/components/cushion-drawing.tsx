@@ -2,7 +2,7 @@ import type { DimensionShape, Drawing, DrawShape, Pen } from '@settlewright/geom
 import { useMemo } from 'react';
 import { splitFractions } from '@/components/measure.tsx';
 import { useFormat } from '@/lib/format.ts';
-import { useWidth } from '../use-width.ts';
+import { useWidth } from '@/lib/use-width.ts';
 import {
   dimensionLine,
   fitDrawing,

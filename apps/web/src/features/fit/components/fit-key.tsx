@@ -1,4 +1,5 @@
 import { confidenceWords } from '@settlewright/anthropometry';
+import { CAUTION } from '@/lib/caution.ts';
 import { dayWords } from '@/lib/dates.ts';
 import { useFitView } from '../fit-view.ts';
 
@@ -16,12 +17,7 @@ export function FitKey() {
 
 /** Stands under every sheet. */
 export function FitCaution({ small = false }: { small?: boolean }) {
-  return (
-    <p className={small ? 'text-xs text-ink-2' : 'text-sm text-ink-2'}>
-      Guidance, not certification. Local codes, the authority having jurisdiction and licensed practice
-      decide. Body data describe surveyed groups, not a person: try the seat.
-    </p>
-  );
+  return <p className={small ? 'text-xs text-ink-2' : 'text-sm text-ink-2'}>{CAUTION}</p>;
 }
 
 /** How sure the verdicts of this sheet are, and since when the workshop asks that. */
