@@ -57,6 +57,8 @@ export type ServerFitSheet = FitSheet & {
 export interface PictureMaker {
   picture: (document: SetDocument) => RoomPicture;
   check: (document: SetDocument) => FitSheet;
+  /** The same without the row of the public, for pages that try many sets. */
+  tryOut: (document: SetDocument) => FitSheet;
 }
 
 interface BodyInput {
@@ -102,6 +104,7 @@ export function createPictureMaker(
 ): PictureMaker {
   const situations = new WeakMap<SetDocument, SetSituation>();
   const sheets = new WeakMap<SetDocument, FitSheet>();
+  const trials = new WeakMap<SetDocument, FitSheet>();
   const pictures = new WeakMap<SetDocument, RoomPicture>();
   const makeBody = createBodyMaker();
 
@@ -111,20 +114,24 @@ export function createPictureMaker(
     return situation;
   }
 
-  function check(document: SetDocument): FitSheet {
+  function made(document: SetDocument, kept: WeakMap<SetDocument, FitSheet>, sittersOnly: boolean): FitSheet {
     if (server) return server;
     const sheet =
-      sheets.get(document) ??
+      kept.get(document) ??
       checkSet({
         situation: situationOf(document),
         sitters: sittersOf(document, cast, engine.model),
         ruleBook: engine.ruleBook,
         model: engine.model,
         settings: { ...document.asked, ...(typeof confidence === 'number' && { confidence }) },
+        sittersOnly,
       });
-    sheets.set(document, sheet);
+    kept.set(document, sheet);
     return sheet;
   }
+
+  const check = (document: SetDocument): FitSheet => made(document, sheets, false);
+  const tryOut = (document: SetDocument): FitSheet => made(document, trials, true);
 
   function inputs(document: SetDocument): Map<string, BodyInput> {
     if (server?.bodies) {
@@ -176,16 +183,16 @@ export function createPictureMaker(
     const known = pictures.get(document);
     if (known) return known;
     const situation = situationOf(document);
-    const made: RoomPicture = {
+    const whole: RoomPicture = {
       document,
       parts: deriveParts(document),
       situation,
       sheet: check(document),
       bodies: bodiesOf(document, situation),
     };
-    pictures.set(document, made);
-    return made;
+    pictures.set(document, whole);
+    return whole;
   }
 
-  return { picture, check };
+  return { picture, check, tryOut };
 }

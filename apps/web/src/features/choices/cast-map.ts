@@ -1,0 +1,154 @@
+import type { FitSheet, PlaceSituation, Verdict } from '@settlewright/anthropometry';
+import { measureSet, type Dimension, type SetDocument } from '@settlewright/geometry';
+
+/** Where one sitter is at least tight, over two dimensions. */
+export interface Region {
+  sitterId: string;
+  placeId: string;
+  name: string;
+  /** Room to the nearest fail line at each point, rows of `up`; negative when missing. */
+  rooms: number[][];
+}
+
+/** Two dimensions tried against each other. */
+export interface CastMap {
+  across: number[];
+  up: number[];
+  regions: Region[];
+  /** Sitters that are at least tight at each point; what is not known is not served. */
+  served: number[][];
+  placesAt: PlaceSituation[][][];
+}
+
+const ACROSS = 20;
+const FAR = 300;
+
+/** Values along a dimension that a map tries: multiples of the rounding step, about twenty. */
+export function gridValues({ min, max }: Pick<Dimension, 'min' | 'max'>, step: number): number[] {
+  const wide = step * Math.max(1, Math.ceil((max - min) / step / ACROSS - 1e-6));
+  const values: number[] = [];
+  for (let n = Math.ceil(min / wide - 1e-6); n * wide <= max + 1e-6; n += 1) values.push(n * wide);
+  return values;
+}
+
+interface MapInput {
+  across: readonly number[];
+  up: readonly number[];
+  documentAt: (across: number, up: number) => SetDocument | undefined;
+  check: (document: SetDocument) => FitSheet;
+}
+
+type Said = Map<string, { margin: number; verdict: Verdict }>;
+
+/**
+ * Tries every pair of values.
+ *
+ * @returns a generator that yields how many points were tried and returns the map
+ */
+export function* castMap({ across, up, documentAt, check }: MapInput): Generator<number, CastMap, void> {
+  const sheets: (FitSheet | undefined)[][] = [];
+  const placesAt: PlaceSituation[][][] = [];
+  let done = 0;
+  for (const second of up) {
+    const row: (FitSheet | undefined)[] = [];
+    const places: PlaceSituation[][] = [];
+    for (const first of across) {
+      const document = documentAt(first, second);
+      row.push(document && check(document));
+      places.push(document ? measureSet(document).places : []);
+      done += 1;
+      yield done;
+    }
+    sheets.push(row);
+    placesAt.push(places);
+  }
+  const people = sheets.flat().find((sheet) => sheet !== undefined)?.rows ?? [];
+  const answers = people.map(({ placeId }) =>
+    sheets.map((row) => row.map((sheet) => saidAt(sheet, placeId))),
+  );
+  const moving = movingRules(answers.map((grid) => grid.flat()));
+  const regions = people.map(({ sitterId, placeId, name }, n) => ({
+    sitterId,
+    placeId,
+    name,
+    rooms: (answers[n] ?? []).map((row) => row.map((said) => roomOf(said, moving))),
+  }));
+  const served = sheets.map((row, i) =>
+    row.map((_, j) => answers.filter((grid) => isServed(grid[i]?.[j], moving)).length),
+  );
+  return { across: [...across], up: [...up], regions, served, placesAt };
+}
+
+function saidAt(sheet: FitSheet | undefined, placeId: string): Said | undefined {
+  const cells = sheet?.rows.find((row) => row.placeId === placeId)?.cells;
+  if (!cells) return undefined;
+  const said: Said = new Map();
+  for (const { ruleId, outcome } of cells) {
+    if (outcome.kind === 'verdict') said.set(ruleId, outcome);
+  }
+  return said;
+}
+
+/** Rules whose room changes for somebody somewhere on the map. */
+function movingRules(answers: readonly (Said | undefined)[][]): Set<string> {
+  const moving = new Set<string>();
+  for (const along of answers) {
+    const first = along.find((said) => said !== undefined);
+    for (const said of along) {
+      for (const [ruleId, { margin }] of said ?? []) {
+        if (Math.abs(margin - (first?.get(ruleId)?.margin ?? Infinity)) > 1e-6) moving.add(ruleId);
+      }
+    }
+  }
+  return moving;
+}
+
+function roomOf(said: Said | undefined, moving: ReadonlySet<string>): number {
+  if (!said) return -FAR;
+  const rooms = [...said].filter(([ruleId]) => moving.has(ruleId)).map(([, { margin }]) => margin);
+  return Math.min(FAR, Math.max(-FAR, Math.min(FAR, ...rooms)));
+}
+
+function isServed(said: Said | undefined, moving: ReadonlySet<string>): boolean {
+  if (!said) return false;
+  return [...said].every(
+    ([ruleId, { verdict }]) => !moving.has(ruleId) || verdict === 'fits' || verdict === 'tight',
+  );
+}
+
+/** A pair of values that is worth a look. */
+export interface BestPair {
+  across: number;
+  up: number;
+  served: number;
+  share: number | undefined;
+}
+
+/** Pairs that serve most sitters, then most of the public, then lie nearest to the present. */
+export function bestPairs(
+  { across, up, served }: Pick<CastMap, 'across' | 'up' | 'served'>,
+  shares: readonly (readonly (number | null)[])[] | undefined,
+  present: { across: number; up: number },
+  most = 5,
+): BestPair[] {
+  const far = (pair: BestPair) =>
+    Math.abs(pair.across - present.across) / span(across) + Math.abs(pair.up - present.up) / span(up);
+  return up
+    .flatMap((second, i) =>
+      across.map((first, j): BestPair => ({
+        across: first,
+        up: second,
+        served: served[i]?.[j] ?? 0,
+        share: shares?.[i]?.[j] ?? undefined,
+      })),
+    )
+    .sort(
+      (a, b) =>
+        b.served - a.served ||
+        Math.round((b.share ?? 0) * 100) - Math.round((a.share ?? 0) * 100) ||
+        far(a) - far(b),
+    )
+    .slice(0, most);
+}
+
+const span = (values: readonly number[]): number => Math.max((values.at(-1) ?? 0) - (values[0] ?? 0), 1e-6);

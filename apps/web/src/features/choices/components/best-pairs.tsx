@@ -1,0 +1,84 @@
+import type { Dimension } from '@settlewright/geometry';
+import { Button } from '@/components/button.tsx';
+import { Measure } from '@/components/measure.tsx';
+import type { BestPair, CastMap } from '../cast-map.ts';
+import { useChoices } from '../choices-view.ts';
+import { inHundred, joinNames, shortName, showValue } from '../words.ts';
+
+interface BestPairsProps {
+  pairs: readonly BestPair[];
+  map: CastMap;
+  first: Dimension;
+  second: Dimension;
+  onTake: ((pair: BestPair) => void) | undefined;
+}
+
+const CELL = 'border-b border-rule py-2 pr-5 text-left align-baseline';
+
+/** The best pairs of values in words; the map for those who do not see it. */
+export function BestPairs({ pairs, map, first, second, onTake }: BestPairsProps) {
+  const { style } = useChoices();
+  const people = map.regions.length;
+  return (
+    <div className="overflow-x-auto" tabIndex={0} role="region" aria-label="Best pairs of values">
+      <table className="w-full text-sm">
+        <caption className="pb-2 text-left font-semibold">Best pairs of values</caption>
+        <thead className="text-xs text-ink-3">
+          <tr>
+            {[first.label, second.label, 'Seated here', 'Public, all checks'].map((head) => (
+              <th key={head} scope="col" className={`${CELL} font-medium`}>
+                {head}
+              </th>
+            ))}
+            {onTake && (
+              <td className={CELL}>
+                <span className="sr-only">Take it</span>
+              </td>
+            )}
+          </tr>
+        </thead>
+        <tbody>
+          {pairs.map((pair) => {
+            const [a, b] = [
+              showValue(pair.across, first.unit, style),
+              showValue(pair.up, second.unit, style),
+            ];
+            const lost = lostAt(map, pair);
+            return (
+              <tr key={`${pair.across} ${pair.up}`}>
+                <td className={CELL}>
+                  <Measure text={a} />
+                </td>
+                <td className={CELL}>
+                  <Measure text={b} />
+                </td>
+                <td className={CELL}>
+                  {pair.served === people ? `all ${people}` : `${pair.served} of ${people}`}
+                  {lost.length > 0 && `, not ${joinNames(lost)}`}
+                </td>
+                <td className={CELL}>
+                  {pair.share === undefined ? 'not counted yet' : `about ${inHundred(pair.share)}`}
+                </td>
+                {onTake && (
+                  <td className={CELL}>
+                    <Button look="word" onClick={() => onTake(pair)}>
+                      Take both
+                      <span className="sr-only">
+                        , {a} and {b}
+                      </span>
+                    </Button>
+                  </td>
+                )}
+              </tr>
+            );
+          })}
+        </tbody>
+      </table>
+    </div>
+  );
+}
+
+function lostAt({ across, up, regions }: CastMap, pair: BestPair): string[] {
+  const [i, j] = [up.indexOf(pair.up), across.indexOf(pair.across)];
+  return regions.filter(({ rooms }) => (rooms[i]?.[j] ?? 0) < 0).map(({ name }) => shortName(name));
+}

@@ -1,0 +1,71 @@
+import { memo } from 'react';
+import { Disclosure } from '@/components/disclosure.tsx';
+import { LoadingLine } from '@/components/loading.tsx';
+import { Measure } from '@/components/measure.tsx';
+import { useChoices } from '../choices-view.ts';
+import { shareAt, type ShareCurves } from '../use-share-curve.ts';
+import { inHundred, showValue } from '../words.ts';
+
+interface PublicWordsProps {
+  curves: ShareCurves | undefined;
+  present: number;
+  suggested: number | undefined;
+  unit: 'mm' | 'deg' | 'N';
+  whole: string;
+  wear: string;
+}
+
+const told = (share: number | undefined) => (share === undefined ? 'not known' : `about ${inHundred(share)}`);
+
+/** The share of the public in words: by the shown checks, and by every check at once. */
+export const PublicWords = memo(function PublicWords({
+  curves,
+  present,
+  suggested,
+  unit,
+  whole,
+  wear,
+}: PublicWordsProps) {
+  const { style } = useChoices();
+  if (!curves) {
+    return (
+      <div className="mt-5">
+        <LoadingLine words="Counting people" />
+      </div>
+    );
+  }
+  const values = suggested === undefined ? [present] : [present, suggested];
+  const { told: from, points, joint } = curves;
+  return (
+    <div className="mt-5 text-sm">
+      <p>
+        <span className="font-semibold">Share who fit</span> of {whole}, with {wear}.
+      </p>
+      <dl className="mt-1 grid w-fit grid-cols-[auto_auto_auto] gap-x-6 gap-y-0.5">
+        {values.map((value) => (
+          <div key={value} className="col-span-3 grid grid-cols-subgrid">
+            <dt className="text-ink-3">
+              at <Measure text={showValue(value, unit, style)} />
+            </dt>
+            <dd>{told(shareAt(points, value))} by the checks shown</dd>
+            <dd className="text-ink-2">
+              {told(shareAt(joint, value))} by every check of a person at once (dashed)
+            </dd>
+          </div>
+        ))}
+      </dl>
+      <p className="mt-1 max-w-text text-ink-2">
+        All else is held as it is drawn. Ten thousand people are drawn from the survey’s statistics, so a
+        share is good to about one in 100 of those surveyed, and less for anybody else.
+      </p>
+      <Disclosure words="Who these people are">
+        <ul className="max-w-text list-disc pl-5 text-ink-2">
+          {from.cautions.map((caution) => (
+            <li key={caution}>{caution}</li>
+          ))}
+          <li>Source: {from.source}.</li>
+        </ul>
+      </Disclosure>
+    </div>
+  );
+});

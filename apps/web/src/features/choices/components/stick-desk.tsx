@@ -1,0 +1,145 @@
+import type { StoryStick } from '@settlewright/geometry';
+import { useMemo, useRef } from 'react';
+import { Notice } from '@/components/notice.tsx';
+import { CROWD_WEAR, crowdWords, type CrowdChoice } from '@/lib/crowd/crowds.ts';
+import { useWidth } from '@/lib/use-width.ts';
+import { boardLayout } from '../board-layout.ts';
+import { useChoices } from '../choices-view.ts';
+import { commonWords, countsWords } from '../common-words.ts';
+import { stickBands } from '../stick-bands.ts';
+import type { TriedValues } from '../tried-values.ts';
+import { shareAt, useShareCurves } from '../use-share-curve.ts';
+import { useStickValues } from '../use-stick-values.ts';
+import { inHundred, sayValue, showSize } from '../words.ts';
+import { CrowdChooser } from './crowd-chooser.tsx';
+import { Decision } from './decision.tsx';
+import { PlumbSlider } from './plumb-slider.tsx';
+import { PublicWords } from './public-words.tsx';
+import { SaveStick } from './save-stick.tsx';
+import { StickBoard } from './stick-board.tsx';
+import { StickLegend } from './stick-legend.tsx';
+import { StickTable } from './stick-table.tsx';
+
+interface StickDeskProps {
+  tried: TriedValues;
+  stick: StoryStick;
+  rule: string;
+  crowd: CrowdChoice;
+  onCrowd: (crowd: CrowdChoice) => void;
+}
+
+const WIDTH = 962;
+
+/** The stick, the hand on its plumb line, and the choice beside it. */
+export function StickDesk({ tried, stick, rule, crowd, onCrowd }: StickDeskProps) {
+  const { ruleBook, style } = useChoices();
+  const { dimension } = tried;
+  const { unit } = dimension;
+  const drawing = useRef<SVGSVGElement>(null);
+  const [measure, width = WIDTH] = useWidth();
+  const values = useStickValues(tried, stick, rule);
+  const { rows, ruleIds, present, shown, suggested, answersAt } = values;
+  const counted = useMemo(() => [...ruleIds], [ruleIds]);
+  const { curves, fault } = useShareCurves(tried, counted, crowd);
+  const bands = useMemo(() => stickBands(stick, ruleBook, style), [stick, ruleBook, style]);
+  const layout = useMemo(
+    () =>
+      boardLayout({
+        width,
+        rows: rows.length,
+        bands: bands.length,
+        min: dimension.min,
+        max: dimension.max,
+      }),
+    [width, rows, bands, dimension],
+  );
+  const answers = useMemo(() => answersAt(shown), [answersAt, shown]);
+  const presentAnswers = useMemo(() => answersAt(present), [answersAt, present]);
+  const suggestedAnswers = useMemo(
+    () => (suggested === undefined ? [] : answersAt(suggested)),
+    [answersAt, suggested],
+  );
+  const whole = useMemo(() => crowdWords(crowd), [crowd]);
+  const crowdLines = useMemo(() => whole.split(/(?<=,) /), [whole]);
+  const share = curves && shareAt(curves.points, shown);
+  const words = [
+    sayValue(shown, unit, style),
+    countsWords(answers.map((answer) => answer?.outcome.verdict)),
+    ...(share === undefined ? [] : [`about ${inHundred(share)}`]),
+  ].join('; ');
+  const common = useMemo(
+    () => commonWords(stick, { present, step: tried.step, style }),
+    [stick, present, tried, style],
+  );
+  const below = useMemo(() => [common, ...bands.map((band) => band.words)], [common, bands]);
+  return (
+    <div className="grid gap-x-9 gap-y-8 desk:grid-cols-[minmax(0,1fr)_20rem]">
+      <div className="min-w-0">
+        <div ref={measure} className="relative">
+          <StickBoard
+            ref={drawing}
+            layout={layout}
+            stick={stick}
+            rows={rows}
+            bands={bands}
+            curves={curves}
+            crowd={crowdLines}
+            shown={shown}
+            settled={shown === present}
+            answers={answers}
+            suggested={suggested}
+            suggestedAnswers={suggestedAnswers}
+          />
+          <PlumbSlider
+            layout={layout}
+            tried={tried}
+            shown={shown}
+            band={stick.allFit[0] ?? stick.allTight[0]}
+            label={dimension.label}
+            words={words}
+            onMove={values.move}
+            onRelease={values.settle}
+            onLeave={values.leave}
+          />
+        </div>
+        <StickLegend common={common} bands={bands} />
+        {fault && (
+          <Notice tone="wont" className="mt-3">
+            The shares could not be counted. {fault}
+          </Notice>
+        )}
+        <PublicWords
+          curves={curves}
+          present={present}
+          suggested={suggested}
+          unit={unit}
+          whole={whole}
+          wear={`shoes of ${showSize(CROWD_WEAR.shoeMm, 'mm', style)}, ${CROWD_WEAR.clothing} clothes`}
+        />
+        <div className="mt-4 max-w-text">
+          <CrowdChooser crowd={crowd} onChange={onCrowd} />
+        </div>
+        <div className="mt-4 flex flex-wrap items-start gap-x-8 gap-y-3">
+          <StickTable
+            caption={`Bands of ${dimension.label.toLowerCase()}`}
+            unit={unit}
+            rows={rows}
+            present={present}
+            answers={presentAnswers}
+            suggested={suggested}
+            suggestedAnswers={suggestedAnswers}
+          />
+          <SaveStick drawing={drawing} dimension={dimension} words={below} />
+        </div>
+      </div>
+      <Decision
+        tried={tried}
+        stick={stick}
+        ruleIds={ruleIds}
+        present={present}
+        suggested={suggested}
+        curves={curves}
+      />
+    </div>
+  );
+}

@@ -1,0 +1,94 @@
+import { dimensionOf, type Dimension } from '@settlewright/geometry';
+import { useMemo } from 'react';
+import { Combobox } from '@/components/combobox.tsx';
+import { LoadingLine } from '@/components/loading.tsx';
+import { Notice } from '@/components/notice.tsx';
+import { RuleHeading } from '@/components/rule-heading.tsx';
+import { crowdWords, type CrowdChoice } from '@/lib/crowd/crowds.ts';
+import { useWidth } from '@/lib/use-width.ts';
+import { bestPairs, type BestPair } from '../cast-map.ts';
+import { useChoices } from '../choices-view.ts';
+import type { TriedValues } from '../tried-values.ts';
+import { useCastMap } from '../use-cast-map.ts';
+import { dimensionWords, showValue } from '../words.ts';
+import { BestPairs } from './best-pairs.tsx';
+import { MapDrawing } from './map-drawing.tsx';
+
+interface TwoDimensionsProps {
+  tried: TriedValues;
+  offered: readonly Dimension[];
+  second: string | undefined;
+  crowd: CrowdChoice;
+  onSecond: (id: string | undefined) => void;
+}
+
+const WIDTH = 720;
+
+/** The dimension against another one: where everybody is served, and how many of the public. */
+export function TwoDimensions({ tried, offered, second: secondId, crowd, onSecond }: TwoDimensionsProps) {
+  const { document, replace, style } = useChoices();
+  const [measure, width = WIDTH] = useWidth();
+  const { dimension: first } = tried;
+  const { second, map, shares, done, fault } = useCastMap(
+    tried,
+    secondId === first.id ? undefined : secondId,
+    crowd,
+  );
+  const now = tried.valueOf(document) ?? first.value;
+  const present = useMemo(
+    () => ({ across: now, up: (secondId && dimensionOf(document, secondId)?.value) || 0 }),
+    [now, document, secondId],
+  );
+  const pairs = useMemo(() => (map ? bestPairs(map, shares, present) : []), [map, shares, present]);
+  const take = ({ across, up }: BestPair) => {
+    const moved = first.at(across);
+    const set = moved && second?.at(up, moved);
+    if (!set || !second || !replace) return;
+    const step = (one: Dimension, from: number, to: number) =>
+      `${one.label} ${showValue(from, one.unit, style)} to ${showValue(to, one.unit, style)}`;
+    replace(set, `${step(first, now, across)}, ${step(second, present.up, up)}`);
+  };
+  return (
+    <section aria-labelledby="two-heading" className="mt-12">
+      <RuleHeading id="two-heading">Two dimensions</RuleHeading>
+      <div className="mb-4 grid max-w-text gap-2">
+        <Combobox
+          label={`${first.label} against`}
+          placeholder="Choose another dimension"
+          value={secondId ?? null}
+          choices={offered
+            .filter(({ id }) => id !== first.id)
+            .map((one) => ({ id: one.id, words: dimensionWords(one) }))}
+          onChange={(id) => onSecond(id ?? undefined)}
+        />
+        <p className="text-sm text-ink-2">
+          Each outline is where that sitter is at least tight by every check that either number moves. The
+          darker the ground, the more of {crowdWords(crowd)} fit every check of a person at once; dotted lines
+          at 25, 50 and 75 in 100.
+        </p>
+      </div>
+      {fault && (
+        <Notice tone="wont" className="mb-4">
+          The shares could not be counted. {fault}
+        </Notice>
+      )}
+      {second && !map && <LoadingLine words={`Trying both, ${Math.round(done * 100)} in 100 done`} />}
+      {second && map && (
+        <div className="grid gap-x-9 gap-y-6 desk:grid-cols-[minmax(0,1fr)_28rem]">
+          <div ref={measure} className="min-w-0">
+            <MapDrawing
+              map={map}
+              shares={shares}
+              first={first}
+              second={second}
+              present={present}
+              width={width}
+            />
+            {!shares && !fault && <LoadingLine words="Counting people" />}
+          </div>
+          <BestPairs pairs={pairs} map={map} first={first} second={second} onTake={replace && take} />
+        </div>
+      )}
+    </section>
+  );
+}

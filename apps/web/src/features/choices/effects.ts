@@ -1,0 +1,111 @@
+import type { FitSheet, RuleBook } from '@settlewright/anthropometry';
+import {
+  isGain,
+  isLoss,
+  sheetChanges,
+  type CellChange,
+  type CellState,
+  type LengthStyle,
+} from '@settlewright/geometry';
+import { verdictWord } from '@/components/verdict.tsx';
+import { answerAt, shortBy } from './answers.ts';
+import { joinNames, shortName } from './words.ts';
+
+/** What a choice does, in words. */
+export interface Effects {
+  better: string[];
+  worse: string[];
+  /** Who still does not fit, and what is missing. */
+  lost: string[];
+  /** Other checks that keep what they say. */
+  kept: number;
+  /** Who falls to which verdict, for beside the button. */
+  newly: { words: string; names: string }[];
+}
+
+const STATE_WORDS: Partial<Record<CellState, string>> = {
+  inside: 'inside the clause',
+  outside: 'outside the clause',
+  gone: 'does not apply',
+};
+const stateWord = (state: CellState): string => STATE_WORDS[state] ?? verdictWord(state as 'fits');
+
+interface Input {
+  before: FitSheet;
+  after: FitSheet;
+  /** Rules that the page is about; their gains are said shortest. */
+  ruleIds: ReadonlySet<string>;
+  ruleBook: RuleBook;
+  style: LengthStyle;
+}
+
+/** Who gains and who loses between two sheets, by name. */
+export function effectsOf({ before, after, ruleIds, ruleBook, style }: Input): Effects {
+  const names = new Map(before.rows.map(({ sitterId, name }) => [sitterId, shortName(name)]));
+  const whoOf = ({ sitterId, marks }: CellChange) => names.get(sitterId ?? '') ?? joinNames(marks);
+  const checkOf = ({ ruleId }: CellChange) => ruleBook.rule(ruleId).columnName.toLowerCase();
+  const changes = sheetChanges(before, after);
+  const alone = ruleIds.size === 1;
+  const brief = (change: CellChange) => alone && ruleIds.has(change.ruleId) && change.sitterId !== undefined;
+  const inFull = (change: CellChange) =>
+    `, ${checkOf(change)}: ${stateWord(change.from)} to ${stateWord(change.to)}`;
+  const losses = changes.filter(isLoss);
+  const gains = changes.filter(isGain);
+  return {
+    better: [
+      ...gathered(gains.filter(brief), ({ to }) => to, whoOf).map(({ change, who, many }) =>
+        change.to === 'fits'
+          ? `${who} ${many ? 'fit' : 'fits'}`
+          : `${who} ${many ? 'turn' : 'turns'} ${stateWord(change.to)}`,
+      ),
+      ...gathered(
+        gains.filter((change) => !brief(change)),
+        inFull,
+        whoOf,
+      ).map(({ change, who }) => who + inFull(change)),
+    ],
+    worse: gathered(losses, inFull, whoOf).map(({ change, who }) => who + inFull(change)),
+    lost: lostIn(after, ruleIds, ruleBook, style),
+    kept:
+      before.rows
+        .flatMap(({ cells }) => cells)
+        .concat(before.piecesAndWays)
+        .filter(speaks).length - changes.length,
+    newly: gathered(losses, ({ to }) => to, whoOf).map(({ change, who }) => ({
+      words: `Newly ${stateWord(change.to)}`,
+      names: who,
+    })),
+  };
+}
+
+const speaks = ({ outcome: { kind } }: FitSheet['piecesAndWays'][number]): boolean =>
+  kind === 'verdict' || kind === 'clause';
+
+/** Who does not fit by the shown rules, and what is missing: "Hetty, 2⅛″ short". */
+export function lostIn(
+  sheet: FitSheet,
+  ruleIds: ReadonlySet<string>,
+  ruleBook: RuleBook,
+  style: LengthStyle,
+): string[] {
+  return sheet.rows.flatMap(({ placeId, name }) => {
+    const answer = answerAt(sheet, placeId, ruleIds);
+    return answer?.outcome.verdict === 'wontFit'
+      ? [`${shortName(name)}, ${shortBy(answer, ruleBook, style)}`]
+      : [];
+  });
+}
+
+/** Changes that are said in one line, with everybody whom they touch. */
+function gathered(
+  changes: readonly CellChange[],
+  keyOf: (change: CellChange) => string,
+  whoOf: (change: CellChange) => string,
+): { change: CellChange; who: string; many: boolean }[] {
+  const groups = new Map<string, CellChange[]>();
+  for (const change of changes) groups.set(keyOf(change), [...(groups.get(keyOf(change)) ?? []), change]);
+  return [...groups.values()].map((group) => {
+    const who = [...new Set(group.map(whoOf))];
+    return { change: group[0] as CellChange, who: joinNames(who), many: who.length > 1 };
+  });
+}

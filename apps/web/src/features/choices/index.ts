@@ -1,0 +1,2 @@
+export { ChoicesContext } from './choices-view.ts';
+export { StickPage } from './components/stick-page.tsx';

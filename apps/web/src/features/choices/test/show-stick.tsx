@@ -1,0 +1,99 @@
+import {
+  checkSet,
+  createBodyModel,
+  loadRuleBook,
+  type FitSheet,
+  type KnownPerson,
+  type Sitter,
+} from '@settlewright/anthropometry';
+import { ARRANGEMENTS, measureSet, type SetDocument } from '@settlewright/geometry';
+import rules from '@settlewright/seed-data/fit-rules.json';
+import summary from '@settlewright/seed-data/populations/ansur2.json';
+import { useState } from 'react';
+import { renderPage } from '@/test/render-page.tsx';
+import { ChoicesContext, type ChoicesView } from '../choices-view.ts';
+import { StickPage } from '../components/stick-page.tsx';
+
+const model = createBodyModel(summary);
+export const ruleBook = loadRuleBook(rules);
+export const INCHES = { system: 'feet-inches', roundTo: 8 } as const;
+
+const arrangement = ARRANGEMENTS.find(({ id }) => id === 'facing-benches');
+export const facingBenches: SetDocument = arrangement?.build() ?? failed();
+function failed(): never {
+  throw new Error('There is no arrangement of facing benches.');
+}
+
+const person = (mm: number, popliteal: number, weightKg: number): KnownPerson => ({
+  bodyData: mm < 1700 ? 'women' : 'men',
+  stature: { mm, source: 'measured' },
+  weightKg,
+  measured: { popliteal_height: popliteal, buttock_popliteal_length: popliteal + 90 },
+  shoeMm: 25,
+  clothing: 'light',
+});
+
+interface Seated {
+  id: string;
+  name: string;
+  person: KnownPerson;
+}
+
+/** A short woman and a tall man, both measured; no seat height suits both. */
+export const HETTY: Seated = { id: 'hetty', name: 'Hetty Vance', person: person(1511, 360, 52) };
+const MARCUS: Seated = { id: 'marcus', name: 'Marcus Adeyemi-Rowe', person: person(1905, 480, 95) };
+
+/** As the room checks these people: one sheet a document. */
+export function checkOf(people: readonly Seated[]): ChoicesView['check'] {
+  const sheets = new WeakMap<SetDocument, FitSheet>();
+  return (document) => {
+    const situation = measureSet(document);
+    const sitters = people.map((one, n): Sitter => ({
+      ...one,
+      kind: 'cast',
+      placeId: situation.places[n]?.placeId ?? '',
+    }));
+    const settings = document.asked;
+    const sheet =
+      sheets.get(document) ?? checkSet({ situation, sitters, ruleBook, model, settings, sittersOnly: true });
+    sheets.set(document, sheet);
+    return sheet;
+  };
+}
+
+const check = checkOf([HETTY, MARCUS]);
+
+interface Shown extends Partial<ChoicesView> {
+  /** Told of every step that is taken. */
+  onStep?: (document: SetDocument, step: string) => void;
+}
+
+function Stick({ onStep, ...view }: Shown) {
+  const [document, setDocument] = useState(facingBenches);
+  const replace = (next: SetDocument, step: string) => {
+    setDocument(next);
+    onStep?.(next, step);
+  };
+  const whole: ChoicesView = {
+    document,
+    check,
+    replace,
+    ruleBook,
+    style: INCHES,
+    detail: 'full',
+    colourOf: () => 1,
+    aside: () => '',
+    setName: 'Dining car',
+    draft: '4, nothing issued',
+    ...view,
+  };
+  return (
+    <ChoicesContext value={whole}>
+      <StickPage roomTo="/room" fitTo="/fit" />
+    </ChoicesContext>
+  );
+}
+
+/** The page as a route composes it, on a set that follows. */
+export const showStick = (view: Shown = {}, search = '?d=seat-height') =>
+  renderPage(<Stick {...view} />, { path: '/stick', at: `/stick${search}` });

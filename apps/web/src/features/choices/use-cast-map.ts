@@ -1,0 +1,94 @@
+import { dimensionOf, lengthStep, type Dimension } from '@settlewright/geometry';
+import { useEffect, useMemo, useState } from 'react';
+import { askCrowd } from '@/lib/crowd/ask-crowd.ts';
+import type { CrowdChoice } from '@/lib/crowd/crowds.ts';
+import { castMap, gridValues, type CastMap } from './cast-map.ts';
+import { useChoices } from './choices-view.ts';
+import { inSlices } from './in-slices.ts';
+import { changingPlaces } from './places-along.ts';
+import { stepFor, type TriedValues } from './tried-values.ts';
+
+/** A tenth of the people of the curve's points would show; the map is shaded in broad tones. */
+const MAP_COUNT = 4000;
+
+export interface MapProgress {
+  second: Dimension | undefined;
+  map: CastMap | undefined;
+  /** Joint share at each point; `undefined` while it is counted. */
+  shares: (number | null)[][] | undefined;
+  /** 0 to 1. */
+  done: number;
+  fault: string | undefined;
+}
+
+/** Tries two dimensions against each other, and then counts the public over both. */
+export function useCastMap(
+  tried: TriedValues,
+  secondId: string | undefined,
+  crowd: CrowdChoice,
+): MapProgress {
+  const { document, check, style } = useChoices();
+  const { dimension: first } = tried;
+  const { populationId, women } = crowd;
+  const { lensHeightMm } = document.asked;
+  // From the same set as the first dimension, so that a move along that one changes nothing here.
+  const second = useMemo(() => {
+    const base = first.at(first.value);
+    return base && secondId ? dimensionOf(base, secondId) : undefined;
+  }, [first, secondId]);
+  const stepMm = lengthStep(style);
+  const [found, setFound] = useState<{ second: Dimension; map: CastMap }>();
+  const [counted, setCounted] = useState<{
+    key: string;
+    map: CastMap;
+    shares?: (number | null)[][];
+    fault?: string;
+  }>();
+  const [done, setDone] = useState(0);
+
+  useEffect(() => {
+    if (!second) return undefined;
+    const stop = new AbortController();
+    const across = gridValues(first, stepFor(first.unit, stepMm));
+    const up = gridValues(second, stepFor(second.unit, stepMm));
+    const documentAt = (x: number, y: number) => {
+      const moved = first.at(x);
+      return moved && second.at(y, moved);
+    };
+    const steps = castMap({ across, up, documentAt, check });
+    void inSlices(steps, stop.signal, (tries) => setDone(tries / (across.length * up.length))).then((map) => {
+      if (map) setFound({ second, map });
+      setDone(0);
+    });
+    return () => stop.abort();
+  }, [first, second, stepMm, check]);
+
+  const map = second && found?.second === second ? found.map : undefined;
+  const key = `${populationId} ${women} ${lensHeightMm}`;
+  useEffect(() => {
+    if (!map) return undefined;
+    let current = true;
+    const { across, up, placesAt } = map;
+    const placeIds = changingPlaces(placesAt.flat());
+    if (placeIds.length === 0) return undefined;
+    askCrowd('map', {
+      crowd: { populationId, women },
+      count: MAP_COUNT,
+      ticked: { placeIds },
+      across,
+      up,
+      placesAt,
+      ...(lensHeightMm === undefined ? {} : { lensHeightMm }),
+    }).then(
+      ({ fits }) => current && setCounted({ key, map, shares: fits }),
+      (error: unknown) =>
+        current && setCounted({ key, map, fault: error instanceof Error ? error.message : String(error) }),
+    );
+    return () => {
+      current = false;
+    };
+  }, [map, key, populationId, women, lensHeightMm]);
+
+  const current = counted && counted.map === map && counted.key === key ? counted : undefined;
+  return { second, map, shares: current?.shares, done, fault: current?.fault };
+}

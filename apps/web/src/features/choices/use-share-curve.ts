@@ -1,0 +1,80 @@
+import { useEffect, useState } from 'react';
+import { askCrowd } from '@/lib/crowd/ask-crowd.ts';
+import type { CrowdTold, CurveShare } from '@/lib/crowd/crowd-tasks.ts';
+import type { CrowdChoice } from '@/lib/crowd/crowds.ts';
+import { useChoices } from './choices-view.ts';
+import { inSlices } from './in-slices.ts';
+import { changingPlaces, measuredPlaces } from './places-along.ts';
+import type { TriedValues } from './tried-values.ts';
+
+/** People who are asked: the answer is good to about one in a hundred. */
+export const CROWD_COUNT = 10_000;
+const MOST_POINTS = 49;
+
+/** Shares along a dimension. */
+export interface ShareCurves {
+  /** Of the rules that are shown. */
+  points: CurveShare[];
+  /** Of every check of a person at once, everything else held. */
+  joint: CurveShare[];
+  told: CrowdTold;
+}
+
+type Answer = { key: unknown; curves: ShareCurves } | { key: unknown; fault: string };
+
+/** Asks a crowd along a dimension; `undefined` while it is counted. */
+export function useShareCurves(
+  tried: TriedValues | undefined,
+  ruleIds: readonly string[] | undefined,
+  { populationId, women }: CrowdChoice,
+): { curves?: ShareCurves; fault?: string } {
+  const { document } = useChoices();
+  const { lensHeightMm } = document.asked;
+  const [answer, setAnswer] = useState<Answer>();
+  const key = `${ruleIds?.join(' ')} ${populationId} ${women} ${lensHeightMm}`;
+  useEffect(() => {
+    if (!tried || !ruleIds) return undefined;
+    const stop = new AbortController();
+    const every = Math.ceil(tried.values.length / MOST_POINTS);
+    const values = tried.values.filter((_, n) => n % every === 0 || n === tried.values.length - 1);
+    const ask = async (): Promise<void> => {
+      const along = await inSlices(
+        measuredPlaces(values.map((value) => tried.dimension.at(value))),
+        stop.signal,
+      );
+      if (!along) return;
+      const asked = {
+        crowd: { populationId, women },
+        count: CROWD_COUNT,
+        values: values.filter((_, n) => (along[n] ?? []).length > 0),
+        placesAt: along.filter((places) => places.length > 0),
+        ...(lensHeightMm === undefined ? {} : { lensHeightMm }),
+      };
+      const placeIds = changingPlaces(along);
+      if (placeIds.length === 0) return;
+      const one = await askCrowd('curve', { ...asked, ticked: { ruleIds, placeIds } });
+      const all = await askCrowd('curve', { ...asked, ticked: { placeIds } });
+      const curves = { points: one.points, joint: all.points, told: one.told };
+      if (!stop.signal.aborted) setAnswer({ key, curves });
+    };
+    ask().catch((error: unknown) => {
+      const fault = error instanceof Error ? error.message : 'The shares could not be counted.';
+      if (!stop.signal.aborted) setAnswer({ key, fault });
+    });
+    return () => stop.abort();
+    // The rules are in the key, whatever list holds them.
+    // eslint-disable-next-line react-hooks/exhaustive-deps
+  }, [tried, key]);
+  if (answer?.key !== key) return {};
+  return 'fault' in answer ? { fault: answer.fault } : { curves: answer.curves };
+}
+
+/** Share at a value, between two counted ones by straight interpolation; `undefined` where it is not known. */
+export function shareAt(points: readonly CurveShare[], value: number): number | undefined {
+  const after = points.findIndex((point) => point.value >= value - 1e-6);
+  if (after < 0) return undefined;
+  const [a, b] = [points[Math.max(0, after - 1)], points[after]];
+  if (a?.fits === undefined || b?.fits === undefined) return undefined;
+  if (b.value === a.value || Math.abs(b.value - value) < 1e-6) return b.fits;
+  return a.fits + ((value - a.value) / (b.value - a.value)) * (b.fits - a.fits);
+}
