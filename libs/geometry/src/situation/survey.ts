@@ -49,6 +49,23 @@ export function survey(document: SetDocument): Survey {
 }
 
 /**
+ * @param found - the survey
+ * @returns benches of the set, in the order of its pieces
+ */
+export function benchesOf(found: Survey): PieceOf<'bench'>[] {
+  return found.document.pieces.filter((piece): piece is PieceOf<'bench'> => piece.kind === 'bench');
+}
+
+/**
+ * @param found - the survey
+ * @param bench - a bench of it
+ * @returns places of the bench, from the left as seen from in front
+ */
+export function placesOf(found: Survey, bench: PieceOf<'bench'>): SurveyedPlace[] {
+  return found.places.filter((place) => place.piece.id === bench.id);
+}
+
+/**
  * Solids near a frame, in that frame.
  *
  * @param found - the survey
