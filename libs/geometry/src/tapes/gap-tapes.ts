@@ -1,6 +1,6 @@
 import type { Measure } from './gap.ts';
-import { backHeight, headroom, hipWidth, seatDepth, seatHeight } from './seat-gaps.ts';
-import { elbowToSill, elbowToWall, sillReach, viewOverSill } from './side-gaps.ts';
+import { backHeight, headroom, hipWidth, seatDepth, seatHeight, standingRoom } from './seat-gaps.ts';
+import { elbowToSill, elbowToWall, sillReach, viewOverSill, viewPastSill } from './side-gaps.ts';
 import { bellyRoom, kneeRoom, tableHeight, thighRoom, underTable } from './table-gaps.ts';
 
 /** How the gap of each rule about one sitter is found. */
@@ -17,7 +17,9 @@ export const GAP_OF_RULE: Readonly<Record<string, Measure>> = {
   'SILL-01': elbowToSill,
   'SILL-04': sillReach,
   'SILL-05': viewOverSill,
+  'SILL-06': viewPastSill,
   'HEAD-02': headroom,
+  'HEAD-03': standingRoom,
   'BACK-03': backHeight,
   'SIDE-03': elbowToWall,
 };

@@ -67,6 +67,20 @@ export const headroom: Measure = (view) => {
   );
 };
 
+/** Before the seat, half way into where one stands up. */
+const STANDS_BEFORE_MM = 150;
+
+export const standingRoom: Measure = (view) => {
+  const { overheadAhead, effectiveDepthMm, mark } = view.situation;
+  if (!overheadAhead) return undefined;
+  return rise(
+    view.at(0, 0, effectiveDepthMm + STANDS_BEFORE_MM),
+    overheadAhead.undersideMm,
+    'to stand up in',
+    `floor before ${mark}, where ${view.sitter} stands up, to the underside of ${overheadAhead.mark}`,
+  );
+};
+
 export const backHeight: Measure = (view, _cell, outcome) => {
   const { backTopMm, mark } = view.situation;
   if (backTopMm === undefined) return undefined;

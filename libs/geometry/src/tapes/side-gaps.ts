@@ -50,6 +50,18 @@ export const viewOverSill: Measure = (view, cell, outcome) => {
   );
 };
 
+export const viewPastSill: Measure = (view, cell, outcome) => {
+  const sill = sillOf(view, cell);
+  if (!sill) return undefined;
+  const farEdge = towards(cell.side, sill.centreToEdgeMm + sill.usableDepthMm);
+  return rise(
+    view.at(farEdge, sill.topMm, ELBOW_FORWARD_MM),
+    sill.topMm + outcome.value,
+    'eye over far edge',
+    `far edge of ${sill.mark} to the height of ${view.sitter}’s eye, sitting at ease`,
+  );
+};
+
 export const elbowToWall: Measure = (view, cell, outcome) => {
   const wall = cell.side && view.situation.wallMm[cell.side];
   if (wall === undefined) return undefined;

@@ -16,6 +16,7 @@ import { parametersOf } from '../pieces/parameters.ts';
 import { placeFramesOf } from '../pieces/place-frames.ts';
 import { ARRANGEMENTS } from '../room/arrangements.ts';
 import type { PieceOf, SetDocument } from '../room/document.ts';
+import { newPiece } from '../room/edit-pieces.ts';
 import { measureSet } from '../situation/measure-set.ts';
 import type { TapeLine } from './tape-line.ts';
 import { tapeLines, type TapeBody } from './tape-lines.ts';
@@ -161,6 +162,28 @@ describe('gaps', () => {
     expect(shown.length).toBeGreaterThan(0);
     expect(shown.length).toBeLessThan(gaps(tapes).length);
     for (const { id, valueMm } of shown) expect(valueMm, id).toSatisfy(Number.isFinite);
+  });
+
+  it('show the room to stand up in under what hangs before the seat, and the sight past a sill at its far edge', () => {
+    const under = structuredClone(document);
+    const bench = under.pieces.find((p) => p.kind === 'bench')!;
+    under.pieces.push({
+      ...newPiece('overhead', 'o1', 'O1', bench.at),
+      lengthMm: 4000,
+      depthMm: 3000,
+      undersideMm: 1950,
+    });
+    const { sheet: sheetUnder, tapes: there } = seated(under);
+    const named = (name: string) => there.find((tape) => tape.name === name)!;
+    const standing = named('to stand up in');
+    expect([standing.fromMm[1], standing.toMm[1], standing.valueMm]).toEqual([0, 1950, 1950]);
+    const past = named('eye over far edge');
+    const over = there.find(({ cellId }) => cellId === past.cellId!.replace('SILL-06', 'SILL-05'))!;
+    expect(past.valueMm).toBeCloseTo(over.valueMm, 6);
+    const sills = measureSet(under).places.flatMap(({ sills: beside }) => beside);
+    const apart = Math.hypot(past.fromMm[0] - over.fromMm[0], past.fromMm[2] - over.fromMm[2]);
+    expect(sills.map(({ usableDepthMm }) => Math.round(usableDepthMm))).toContain(Math.round(apart));
+    expect(sheetUnder.rows.flatMap(({ cells }) => cells).some(({ id }) => id === standing.cellId)).toBe(true);
   });
 
   it('between facing benches run from seat front to seat front', () => {
