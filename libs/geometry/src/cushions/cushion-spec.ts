@@ -70,6 +70,8 @@ export interface CushionSpec {
   /** Edge with the zip. */
   zipEdge: 'back' | 'bottom';
   foam: Foam;
+  /** Of a back cushion on a curved back: apex over the pressed seat, and how far it gives way below. */
+  curve?: { apexMm: number; recessMm: number };
   buttons: ButtonTable;
   /** Board joints under or behind the cushion, from the seam on the datum side, rising. */
   boardLinesMm: number[];

@@ -80,6 +80,7 @@ function cushionOf(
     cut: cutCushion(finishedMm, foam.densityKgM3, settings),
     zipEdge: kind === 'seat' ? 'back' : 'bottom',
     foam,
+    ...curveOf(run),
     buttons:
       piece.kind === 'bench' && lines
         ? buttonsOf(
@@ -104,6 +105,12 @@ function placeOf({ piece, kind }: CushionRun) {
       ? piece.seatDepthMm / Math.cos(layout.tiltRad)
       : (layout.backTopMm - layout.seatTopRearMm) / Math.cos(layout.leanRad);
   return { depthMm, thicknessMm, foam };
+}
+
+function curveOf({ piece, kind }: CushionRun): Pick<CushionSpec, 'curve'> {
+  if (kind !== 'back' || piece.kind !== 'bench' || !piece.lumbar) return {};
+  const { apexMm, recessMm } = piece.lumbar;
+  return apexMm === 0 && recessMm === 0 ? {} : { curve: { apexMm, recessMm } };
 }
 
 function edgesOf(run: CushionRun, ends: Ends): CushionSpec['edges'] {

@@ -9,7 +9,7 @@ const OTHER: Record<Hand, Hand> = { left: 'right', right: 'left', either: 'eithe
 
 /** All that a drawing shows of a cushion, or of its mirror image. */
 function likeness(spec: CushionSpec, mirrored: boolean): string {
-  const { kind, hand, edges, finishedMm, cut, zipEdge, foam, buttons, boardLinesMm, datum } = spec;
+  const { kind, hand, edges, finishedMm, cut, zipEdge, foam, curve, buttons, boardLinesMm, datum } = spec;
   const { wallMark: _, side, ...datumLike } = datum;
   const shown = {
     kind,
@@ -21,6 +21,7 @@ function likeness(spec: CushionSpec, mirrored: boolean): string {
     cut,
     zipEdge,
     foam,
+    curve,
     buttons,
     boardLinesMm,
   };

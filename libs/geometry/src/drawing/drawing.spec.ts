@@ -100,6 +100,27 @@ describe('section', () => {
     }
   });
 
+  it('draws the curve of a back from the seat up to its apex, and no line for a flat one', () => {
+    const layout = benchLayout(bench);
+    const curveWith = (lumbar: PieceOf<'bench'>['lumbar']) => {
+      const pieces = document.pieces.map((p) => (p.id === bench.id ? { ...bench, lumbar } : p));
+      const lines = sectionOf({ ...document, pieces }, bench.id).shapes.filter(
+        (s) => s.kind === 'polyline' && s.pieceId === bench.id,
+      );
+      return lines.map((line) => ('points' in line ? line.points : []));
+    };
+    expect(curveWith(undefined)).toEqual([]);
+    expect(curveWith({ apexMm: 0, recessMm: 0 })).toEqual([]);
+    const [curve = []] = curveWith({ apexMm: 220, recessMm: 30 });
+    const behindFace = curve.map(
+      ([x, y]) => layout.faceZMm - (-y - layout.seatTopRearMm) * Math.tan(layout.leanRad) - x,
+    );
+    expect(behindFace[0]).toBeCloseTo(30, 6);
+    expect(behindFace.at(-1)).toBeCloseTo(0, 6);
+    expect(behindFace).toEqual([...behindFace].sort((a, b) => b - a));
+    expect(-curve.at(-1)![1]).toBeCloseTo(layout.pressedTopMm + 220, 6);
+  });
+
   it('measures what the bench says', () => {
     const layout = benchLayout(bench);
     const values = new Map(dimensions(drawing).map((d) => [d.label, d.valueMm]));

@@ -1,6 +1,7 @@
 import type { Part } from '../parts/part.ts';
 import { toRoom } from '../parts/placement.ts';
 import { boardRun } from '../parts/boards.ts';
+import { backCurve } from '../pieces/back-curve.ts';
 import { benchLayout } from '../pieces/bench-layout.ts';
 import { deriveParts } from '../pieces/kinds.ts';
 import { placeFrames } from '../pieces/place-frames.ts';
@@ -136,6 +137,10 @@ export function sectionOf(document: SetDocument, pieceId: string, marginMm = 0):
     ],
     pen: 'outline',
   });
-  if (piece.kind === 'bench') shapes.push(...dimensionsOf(piece, document, cut));
+  if (piece.kind === 'bench') {
+    const curve = backCurve(piece).map(([forward, height]): PagePoint => [forward, -height]);
+    if (curve.length > 0) shapes.push({ kind: 'polyline', points: curve, pen: 'edge', pieceId });
+    shapes.push(...dimensionsOf(piece, document, cut));
+  }
   return drawingOf(shapes, marginMm);
 }
