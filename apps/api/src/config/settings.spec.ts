@@ -42,10 +42,17 @@ describe('settings', () => {
     expect(faults.sort()).toEqual(missing.map((name) => `${name} is missing`));
   });
 
+  it('ask nothing but the database of a worker, in production too', () => {
+    const read = readSettings({ NODE_ENV: 'production', DATABASE_URL }, 'worker');
+    expect(read).toMatchObject({ production: true, blockTimeoutSeconds: 60 });
+    expect(() => readSettings({ NODE_ENV: 'production' }, 'worker')).toThrow('DATABASE_URL is missing');
+  });
+
   it('say what was read and what is accepted, but never a secret', () => {
     const env = {
       ...PRODUCTION,
       PORT: 'http',
+      STUDY_BLOCK_TIMEOUT_SECONDS: '0',
       DEMO: 'yes',
       JWT_SECRET: 'hunter2',
       DATABASE_URL: 'mysql://u:pw@h',
@@ -53,6 +60,7 @@ describe('settings', () => {
     const faults = faultsOf(env).join('\n');
     expect(faults).toContain('PORT: read "http"; accepted: a port from 0 to 65535');
     expect(faults).toContain('DEMO: read "yes"; accepted: 1, true, 0 or false');
+    expect(faults).toContain('SECONDS: read "0"; accepted: whole seconds from 1 to 3600');
     expect(faults).toContain('JWT_SECRET: read a value that is not shown; accepted: at least 32 characters');
     expect(faults).not.toMatch(/hunter2|pw@h/);
   });

@@ -1,32 +1,7 @@
-import {
-  ownPopulation,
-  type Population,
-  readSurvey,
-  type Tally,
-  type WholeSummary,
-} from '@settlewright/anthropometry';
-import { builtInCrowd } from './built-in';
+import type { Population, Tally } from '@settlewright/anthropometry';
 
 /** People to draw from, and how many of each sex were measured where that is known. */
 export interface Crowd {
   population: Population;
   surveyed?: Partial<Tally>;
-}
-
-/** All it takes to make a crowd again elsewhere, whatever becomes of the population meanwhile. */
-export type CrowdData =
-  | { kind: 'built-in'; id: string }
-  | { kind: 'own'; id: string; name: string; source: string; summary: WholeSummary };
-
-export function crowdFrom(data: CrowdData): Crowd {
-  if (data.kind === 'built-in') {
-    const crowd = builtInCrowd(data.id);
-    if (!crowd) throw new Error(`no population ${data.id} comes with this version`);
-    return crowd;
-  }
-  const { id, name, source, summary } = data;
-  return {
-    population: ownPopulation(readSurvey(summary), { id, name, source, licence: 'the workshop’s own' }),
-    surveyed: { women: summary.log.women.n, men: summary.log.men.n },
-  };
 }

@@ -10,7 +10,7 @@ import type { Page, PageQuery } from '../common/page.dto';
 import { Problem } from '../common/problem';
 import { readPage } from '../common/read-page';
 import { builtInIds } from './built-in';
-import type { CrowdData } from './crowd';
+import type { CrowdData } from './crowd-data';
 import { PopulationDetailsDto, PopulationDto } from './dto/population.dto';
 import type { CreatePopulationDto, PopulationPreviewDto, PreviewPopulationDto } from './dto/upload.dto';
 import { OwnPopulation } from './entities/own-population.entity';

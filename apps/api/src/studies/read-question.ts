@@ -1,7 +1,7 @@
 import { PERSON_CHECKS, type PlaceSituation } from '@settlewright/anthropometry';
 import { measureSet, type SetDocument } from '@settlewright/geometry';
 import { Problem, type ProblemField } from '../common/problem';
-import { crowdFrom, type CrowdData } from '../populations/crowd';
+import { crowdFrom, type CrowdData } from '../populations/crowd-data';
 import type { StartStudyDto } from './dto/start-study.dto';
 import type { StudyQuestion } from './study-question';
 

@@ -6,7 +6,7 @@ import { AuditService } from '../audit/audit.service';
 import type { MemberInfo } from '../common/access.decorator';
 import { Problem } from '../common/problem';
 import { InjectSettings, type Settings } from '../config/settings';
-import { crowdFrom } from '../populations/crowd';
+import { crowdFrom } from '../populations/crowd-data';
 import { PopulationsService } from '../populations/populations.service';
 import { DraftsService } from '../sets/drafts.service';
 import { RevisionsService } from '../sets/revisions.service';

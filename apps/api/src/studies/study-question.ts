@@ -1,5 +1,6 @@
 import { mixOf, type PlaceSituation, type StudyShares, type Ticked } from '@settlewright/anthropometry';
-import { type Crowd, type CrowdData, crowdFrom } from '../populations/crowd';
+import type { Crowd } from '../populations/crowd';
+import { type CrowdData, crowdFrom } from '../populations/crowd-data';
 
 /** What people of a study wear; the same for everybody. */
 const SHOE_MM = 25;

@@ -5,7 +5,6 @@ import {
   type PeopleTable,
   readPeople,
   type ReadPeople,
-  readSurvey,
   type RowFault,
   summarise,
   type WholeSummary,
@@ -13,6 +12,7 @@ import {
 import type { ProblemField } from '../../common/problem';
 import { csvText } from '../../common/spreadsheet-cell';
 import { referenceSurvey } from '../built-in';
+import { crowdFrom } from '../crowd-data';
 import type { Mapping } from './mapping';
 import { columnOf, shortened, type SurveyFile } from './survey-file';
 
@@ -59,7 +59,8 @@ export function checkSurvey(file: SurveyFile, mapping: Mapping): CheckedSurvey {
 /** Statistics of the people, every measure that was not taken estimated. */
 export function summaryOf({ people }: CheckedSurvey, source: string): WholeSummary {
   const whole = completeSummary(summarise(people, source), referenceSurvey());
-  readSurvey(whole);
+  // What cannot be drawn from is refused now and not when it is studied.
+  crowdFrom({ kind: 'own', id: '', name: '', source, summary: whole }).population.draw(1, 1);
   return whole;
 }
 
