@@ -7,8 +7,10 @@ import { emptySetDocument } from '../room/read-document.ts';
 import { measureSet } from './measure-set.ts';
 import { cornerIndex, routeBetween, routeThrough } from './route-starts.ts';
 
-const piece = (kind: PieceKind, mark: string, xMm: number, zMm: number, sizes: object = {}): Piece =>
-  ({ ...newPiece(kind, mark.toLowerCase(), mark, { xMm, zMm, turnDeg: 0 }), ...sizes });
+const piece = (kind: PieceKind, mark: string, xMm: number, zMm: number, sizes: object = {}): Piece => ({
+  ...newPiece(kind, mark.toLowerCase(), mark, { xMm, zMm, turnDeg: 0 }),
+  ...sizes,
+});
 
 const table = (mark: string, xMm: number, zMm: number) =>
   piece('table', mark, xMm, zMm, { lengthMm: 1000, widthMm: 600 });
