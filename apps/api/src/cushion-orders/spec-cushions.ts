@@ -40,6 +40,7 @@ function specCushion(
     foamGrade: { ...spec.foam, name: spec.foam.grade },
     foamVolumeM3: cut.foamVolumeM3,
     foamMassKg: cut.foamMassKg,
+    ...(spec.curve && { curve: spec.curve }),
     plates: cut.plates,
     board: cut.boardMm,
     boxing: cut.boxing,

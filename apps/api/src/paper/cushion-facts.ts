@@ -6,6 +6,7 @@ import { leading, type Sheet } from './sheet';
 import type { SpecCushion, SpecPack } from './spec-pack';
 import {
   bareLength,
+  curveWords,
   foamWords,
   handWords,
   marksWords,
@@ -92,6 +93,7 @@ function factsOf(cushion: SpecCushion, pack: SpecPack): Fact[] {
     ],
     ['Buttons', count > 0 ? `${count}${words.buttons ? `, ${brief(words.buttons)}` : ''}` : 'none'],
     ['Board', `${pairWords(board.widthMm, board.depthMm, units)}, if one is asked for`],
+    ['Curve', cushion.curve ? curveWords(cushion.curve, units) : ''],
     ['Cover', words.cover && brief(words.cover)],
     ['Fixing', words.fixing && brief(words.fixing)],
   ];

@@ -48,6 +48,8 @@ export interface SpecCushion {
   foamGrade: { name: string; densityKgM3: number; ifd25N: number; supportFactor: number };
   foamVolumeM3: number;
   foamMassKg: number;
+  /** Of a back cushion on a curved back: apex over the pressed seat, and how far it gives way below. */
+  curve?: { apexMm: number; recessMm: number };
   plates: { widthMm: number; depthMm: number };
   board: { widthMm: number; depthMm: number };
   boxing: { cutHeightMm: number; cutLengthMm: number; finishedLengthMm: number };

@@ -7,7 +7,7 @@ import { scaleFor } from './drawing-scale';
 import { breakLines } from './paragraph';
 import { spaces } from './cushion-chains';
 import { Sheet, type TextStyle } from './sheet';
-import { sinkWords } from './spec-words';
+import { curveWords, sinkWords } from './spec-words';
 
 interface Label {
   text: string;
@@ -125,6 +125,15 @@ describe('words', () => {
     const long = words(20, 'x'.repeat(60));
     expect(long.join('')).toBe('x'.repeat(60));
     for (const line of long) expect(sheet.textWidth(line)).toBeLessThanOrEqual(20);
+  });
+
+  it('state the two sizes of a curved back, and only what is asked', () => {
+    const inches = { system: 'feet-inches', roundTo: 16 } as const;
+    expect(curveWords({ apexMm: 177.8, recessMm: 25.4 }, inches)).toBe(
+      'fullest 7″ over the pressed seat; gives way 1″ for the pelvis below it',
+    );
+    expect(curveWords({ apexMm: 0, recessMm: 25.4 }, inches)).toBe('gives way 1″ for the pelvis');
+    expect(curveWords({ apexMm: 177.8, recessMm: 0 }, inches)).toBe('fullest 7″ over the pressed seat');
   });
 
   it('state the sink for a range of weights, no finer than a quarter of an inch', () => {
