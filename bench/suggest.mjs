@@ -9,7 +9,7 @@ const SEED = 1;
 const STEP_MM = 25.4 / 8;
 const REACH_MM = 2 * 25.4;
 const FREE = [
-  'seat-and-tables',
+  'seat-height',
   'seat-depth',
   'table-height',
   'sill-height',

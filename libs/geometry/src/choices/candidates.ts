@@ -49,6 +49,8 @@ export interface SuggestInput {
   known?: readonly Tried[];
   /** Most choices to try. */
   most?: number;
+  /** Hears of each choice that was tried anew, to be `known` to a later run. */
+  onTried?: (tried: Tried) => void;
 }
 
 /**
@@ -123,8 +125,11 @@ export function createTrials(input: SuggestInput): Trials {
     onGrid,
     at(values) {
       const key = keyOf(values);
-      if (!found.has(key)) found.set(key, attempt(values));
-      return found.get(key);
+      if (found.has(key)) return found.get(key);
+      const tried = attempt(values);
+      found.set(key, tried);
+      if (tried) input.onTried?.(tried);
+      return tried;
     },
     all: () => [...found.values()].filter((one) => one !== undefined),
     present: onGrid(now),

@@ -74,9 +74,12 @@ export function* suggestDimensions(input: SuggestInput): Generator<Suggestion, S
   const most = input.most ?? MOST;
   const { free } = input;
   let done = 0;
+  // What is known from before must not lead the search another way than it went then.
+  const seen = new Set<Tried>();
   const told = () => resultOf(trials, done, most, input);
   const attempt = function* (values: readonly number[]): Generator<Suggestion, Tried | undefined, void> {
     const found = trials.at(trials.onGrid(values));
+    if (found) seen.add(found);
     done += 1;
     yield told();
     return found;
@@ -86,7 +89,7 @@ export function* suggestDimensions(input: SuggestInput): Generator<Suggestion, S
   for (let n = 1; n <= STREWN * Math.max(1, free.length) && done < most / 2; n += 1) {
     yield* attempt(strewn(free, n));
   }
-  for (const start of starts(trials, free)) yield* refine(start, free, attempt, () => done < most);
+  for (const start of starts([...seen], free)) yield* refine(start, free, attempt, () => done < most);
   const end = { ...told(), of: done };
   const blame = blameOf(trials.all(), end.answers[0]?.tried.misses ?? []);
   return { ...end, ...(blame ? { blame } : {}) };
@@ -109,9 +112,9 @@ function additiveRoot(dimensions: number): number {
 }
 
 /** The best choices so far that lie apart. */
-function starts(trials: Trials, free: readonly FreeDimension[]): Tried[] {
+function starts(seen: readonly Tried[], free: readonly FreeDimension[]): Tried[] {
   const chosen: Tried[] = [];
-  for (const one of [...trials.all()].sort((a, b) => costOf(a) - costOf(b))) {
+  for (const one of [...seen].sort((a, b) => costOf(a) - costOf(b))) {
     if (chosen.length === STARTS) break;
     if (chosen.every((other) => gapOf(one, other, free) > APART)) chosen.push(one);
   }

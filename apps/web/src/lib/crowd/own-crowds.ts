@@ -38,7 +38,11 @@ export function useOwnCrowds(): readonly CrowdOption[] {
 }
 
 /** One of the workshop's own surveys with its statistics; asks nothing for a population that ships. */
-export function useOwnCrowd(populationId: string): { own?: OwnCrowd; isPending: boolean; error: Error | null } {
+export function useOwnCrowd(populationId: string): {
+  own?: OwnCrowd;
+  isPending: boolean;
+  error: Error | null;
+} {
   const { id } = useWorkshop();
   const isOwn = OWN_ID.test(populationId);
   const asked = useQuery({

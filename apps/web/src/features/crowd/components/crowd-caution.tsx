@@ -1,0 +1,28 @@
+import { CAUTION } from '@/lib/caution.ts';
+import { RuleHeading } from '@/components/rule-heading.tsx';
+import type { Shares } from '../use-shares.ts';
+import { WEAR_WORDS } from '../words.ts';
+
+/** Who these people are, what is left out, and where it comes from: always in view under the shares. */
+export function CrowdCaution({ shares: { told, people, caution } }: { shares: Shares }) {
+  return (
+    <section aria-labelledby="people-heading" className="mt-10 max-w-text text-sm">
+      <RuleHeading id="people-heading">About these people</RuleHeading>
+      <div className="grid gap-2 text-ink-2">
+        <p>
+          <strong className="font-semibold text-ink">{told.name}.</strong> {told.source}
+        </p>
+        {told.cautions.map((words) => (
+          <p key={words}>{words}</p>
+        ))}
+        <p>
+          {(people.women + people.men).toLocaleString('en-GB')} people were drawn,{' '}
+          {people.women.toLocaleString('en-GB')} of them women. {WEAR_WORDS}
+        </p>
+        <p>{caution.words}.</p>
+        <p className="text-ink-3">Source: {caution.source}.</p>
+        <p>{CAUTION}</p>
+      </div>
+    </section>
+  );
+}

@@ -1,0 +1,18 @@
+import type { RuleBook } from '@settlewright/anthropometry';
+import type { SetDocument } from '@settlewright/geometry';
+import { createContext, useContext } from 'react';
+
+/** What the page of shares reads; the route that composes it provides it. */
+export interface CrowdView {
+  setName: string;
+  document: SetDocument;
+  ruleBook: RuleBook;
+}
+
+export const CrowdContext = createContext<CrowdView | null>(null);
+
+export function useCrowdView(): CrowdView {
+  const view = useContext(CrowdContext);
+  if (view === null) throw new Error('Part of the shares stands outside a CrowdContext.');
+  return view;
+}

@@ -1,0 +1,2 @@
+export { CrowdPage } from './components/crowd-page.tsx';
+export { CrowdContext } from './crowd-view.ts';

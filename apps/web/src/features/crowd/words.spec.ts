@@ -1,0 +1,42 @@
+import { loadRuleBook } from '@settlewright/anthropometry';
+import rules from '@settlewright/seed-data/fit-rules.json';
+import { describe, expect, it } from 'vitest';
+import { ofHundred, rangeWords, rejectionWords, sexWords } from './words.ts';
+
+const ruleBook = loadRuleBook(rules);
+const share = (value: number) => ({ value, low: value, high: value });
+
+describe('shares in words', () => {
+  it.each([
+    [0, '0'],
+    [0.002, 'fewer than 1'],
+    [0.344, '34'],
+    [0.998, 'more than 99'],
+    [1, '100'],
+  ])('%d', (value, words) => expect(ofHundred({ value })).toBe(words));
+
+  it('closes a range that rounding closes', () => {
+    expect(rangeWords({ low: 0.331, high: 0.334 })).toBe('33');
+    expect(rangeWords({ low: 0.33, high: 0.36 })).toBe('33 to 36');
+  });
+
+  it('tells the sexes apart only where there are both', () => {
+    expect(sexWords({ mixed: share(0.3), women: share(0.4), men: share(0.2) })).toBe('women 40, men 20');
+    expect(sexWords({ mixed: share(0.4), women: share(0.4) })).toBeUndefined();
+  });
+
+  it('names the check that turns most away, and the next of the rest', () => {
+    const words = rejectionWords(
+      { ruleId: 'SEAT-02', lost: 0.4 },
+      { ruleId: 'SEAT-04', lost: 0.1 },
+      ruleBook,
+    );
+    expect(words).toBe(
+      'Seat height turns away most: 40 in 100. Of those it leaves, seat depth turns away 10 in 100.',
+    );
+    expect(rejectionWords({ ruleId: 'SEAT-02', lost: 1 }, undefined, ruleBook)).toBe(
+      'Seat height turns everybody away.',
+    );
+    expect(rejectionWords(undefined, undefined, ruleBook)).toBeUndefined();
+  });
+});

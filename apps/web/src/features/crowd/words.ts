@@ -1,0 +1,40 @@
+import type { GroupShares, Rejection, RuleBook, Share } from '@settlewright/anthropometry';
+import { CROWD_WEAR } from '@/lib/crowd/crowds.ts';
+
+/** "34", "fewer than 1", "more than 99": people of 100, rounded so that few are never none. */
+export function ofHundred({ value }: Pick<Share, 'value'>): string {
+  const n = Math.round(value * 100);
+  if (n === 0 && value > 0) return 'fewer than 1';
+  if (n === 100 && value < 1) return 'more than 99';
+  return String(n);
+}
+
+/** "33 to 35": the range of a share, in people of 100; nothing where rounding closes it. */
+export function rangeWords({ low, high }: Pick<Share, 'low' | 'high'>): string {
+  const [from, to] = [Math.round(low * 100), Math.round(high * 100)];
+  return from === to ? `${from}` : `${from} to ${to}`;
+}
+
+/** "women 41, men 27"; nothing for people of one sex. */
+export function sexWords({ women, men }: GroupShares): string | undefined {
+  return women && men ? `women ${ofHundred(women)}, men ${ofHundred(men)}` : undefined;
+}
+
+/** The check that turns most away, and the next of those it leaves. */
+export function rejectionWords(
+  most: Rejection | undefined,
+  next: Rejection | undefined,
+  ruleBook: RuleBook,
+): string | undefined {
+  if (!most) return undefined;
+  const name = (id: string) => ruleBook.rule(id).columnName.toLowerCase();
+  const first = ruleBook.rule(most.ruleId).columnName;
+  const people = ofHundred({ value: most.lost });
+  const all = most.lost === 1;
+  const one = all ? `${first} turns everybody away.` : `${first} turns away most: ${people} in 100.`;
+  if (!next || all) return one;
+  return `${one} Of those it leaves, ${name(next.ruleId)} turns away ${ofHundred({ value: next.lost })} in 100.`;
+}
+
+/** What everybody of the crowd wears. */
+export const WEAR_WORDS = `Everybody wears shoes of ${CROWD_WEAR.shoeMm} mm and ${CROWD_WEAR.clothing} clothes, sits upright with the back against the rest, and presses the cushion by their own weight.`;

@@ -1,0 +1,47 @@
+import type { FitSheet, RuleBook, Sitter } from '@settlewright/anthropometry';
+import type { LengthStyle, SetDocument } from '@settlewright/geometry';
+import { useMemo } from 'react';
+import { useTakeStep } from './hooks/use-take-step.ts';
+import { usePicture, useSurroundings } from './room-context.tsx';
+import { sitterColour, sittersOf } from './sitters.ts';
+
+/** What the pages about suggestions and shares need of the room; the route hands it on. */
+export interface RoomForSuggest {
+  setId: string;
+  setName: string;
+  document: SetDocument;
+  sheet: FitSheet;
+  check: (document: SetDocument) => FitSheet;
+  /** Takes a document as one named step; absent when it cannot be changed here. */
+  replace?: (document: SetDocument, step: string) => void;
+  /** Everyone whose body is known here; nobody for readers without measures. */
+  sitters: Sitter[];
+  ruleBook: RuleBook;
+  style: LengthStyle;
+  colourOf: (sitterId: string) => number;
+}
+
+export function useRoomForSuggest(): RoomForSuggest {
+  const { path, engine, style, canEdit, cast, maker, setName } = useSurroundings();
+  const { document, sheet } = usePicture();
+  const take = useTakeStep();
+  return useMemo(() => {
+    const seatOf = new Map(document.seating.map((seat) => [`${seat.pieceId}:${seat.place}`, seat.sitter]));
+    const placeOf = new Map(sheet.rows.map((row) => [row.sitterId, row.placeId]));
+    return {
+      setId: path.setId,
+      setName,
+      document,
+      sheet,
+      check: maker.check,
+      ...(canEdit && { replace: take }),
+      sitters: sittersOf(document, cast, engine.model),
+      ruleBook: engine.ruleBook,
+      style,
+      colourOf: (sitterId) => {
+        const sitter = seatOf.get(placeOf.get(sitterId) ?? '');
+        return sitter ? sitterColour(sitter, cast) : 6;
+      },
+    };
+  }, [path, setName, document, sheet, maker, canEdit, take, cast, engine, style]);
+}

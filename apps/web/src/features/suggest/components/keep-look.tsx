@@ -1,0 +1,62 @@
+import { useState } from 'react';
+import { Button } from '@/components/button.tsx';
+import { RuleHeading } from '@/components/rule-heading.tsx';
+import { TextArea } from '@/components/text-field.tsx';
+import { useSession } from '@/lib/session.ts';
+import type { Move } from '../effects.ts';
+import { useSuggestView } from '../suggest-view.ts';
+import { differenceWords, withDifference } from '../words.ts';
+
+/** Keep the look knowingly: what was not taken, and why, stands in the known differences. */
+export function KeepLook({ moves }: { moves: readonly Move[] }) {
+  const { document, replace, style } = useSuggestView();
+  const by = useSession((state) => state.user?.name);
+  const offered = differenceWords(moves, style);
+  const [typed, setTyped] = useState<string>();
+  const [reason, setReason] = useState('');
+  const [kept, setKept] = useState(false);
+  const text = (typed ?? offered).trim();
+  if (!replace) return null;
+  return (
+    <section aria-labelledby="keep-heading" className="mt-10 max-w-text">
+      <RuleHeading id="keep-heading">Keep it as it is</RuleHeading>
+      <form
+        className="grid gap-3"
+        onSubmit={(event) => {
+          event.preventDefault();
+          if (text === '') return;
+          const on = new Date().toISOString().slice(0, 10);
+          const said = { id: crypto.randomUUID(), text, reason: reason.trim(), by, on };
+          replace(withDifference(document, said), 'Known difference added');
+          setKept(true);
+          setReason('');
+        }}
+      >
+        <TextArea
+          label="What is kept"
+          value={typed ?? offered}
+          maxLength={1000}
+          rows={2}
+          onChange={(event) => setTyped(event.target.value)}
+        />
+        <TextArea
+          label="Why"
+          description="Stands in the known differences with your name and today’s date."
+          placeholder="For example: the photograph shows it, and the camera sees it."
+          value={reason}
+          maxLength={1000}
+          rows={2}
+          onChange={(event) => setReason(event.target.value)}
+        />
+        <div className="flex flex-wrap items-center gap-4">
+          <Button type="submit">Keep as it is, with a note</Button>
+          {kept && (
+            <span role="status" className="text-sm text-ink-2">
+              Written into the known differences.
+            </span>
+          )}
+        </div>
+      </form>
+    </section>
+  );
+}

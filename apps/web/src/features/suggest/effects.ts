@@ -1,0 +1,113 @@
+import type { FitCell, FitSheet, RuleBook, SitterRow } from '@settlewright/anthropometry';
+import {
+  compareSheets,
+  documentAt,
+  type CellState,
+  type ComparedCell,
+  type Dimension,
+  type FreeDimension,
+  type SetDocument,
+  type Tried,
+} from '@settlewright/geometry';
+import { verdictWord } from '@/components/verdict.tsx';
+
+/** One dimension in an answer. */
+export interface Move {
+  dimension: Dimension;
+  from: number;
+  to: number;
+}
+
+/** What happens to one person, in words by check: "seat height fits". */
+export interface PersonEffect {
+  sitterId: string;
+  name: string;
+  checks: string[];
+}
+
+/** Everything that an answer does. */
+export interface Effects {
+  document: SetDocument;
+  sheet: FitSheet;
+  /** Dimensions that change, then those that stay. */
+  moves: Move[];
+  stays: Move[];
+  better: PersonEffect[];
+  worse: PersonEffect[];
+  /** Checks that are still not met, or not known. */
+  short: PersonEffect[];
+  /** People with every check at least tight, of all. */
+  served: number;
+  of: number;
+  tight: number;
+  /** Pieces and ways that turn better or worse. */
+  piecesBetter: string[];
+  piecesWorse: string[];
+}
+
+/** A move smaller than this is none, in any unit. */
+const SAME = 1e-3;
+
+export const checkWords = (ruleBook: RuleBook, ruleId: string): string =>
+  ruleBook.rule(ruleId).columnName.toLowerCase();
+
+const STATE_WORDS: Record<'inside' | 'outside' | 'gone', string> = {
+  inside: 'inside the clause',
+  outside: 'outside the clause',
+  gone: 'no longer asked',
+};
+
+const stateWords = (state: CellState): string =>
+  state === 'inside' || state === 'outside' || state === 'gone' ? STATE_WORDS[state] : verdictWord(state);
+
+const isShort = ({ outcome }: FitCell): boolean =>
+  outcome.kind === 'verdict' && (outcome.verdict === 'wontFit' || outcome.verdict === 'notKnown');
+
+/** Cells of a row that are not at least tight. */
+export const shortCells = (row: SitterRow): FitCell[] => row.cells.filter(isShort);
+
+interface Ground {
+  document: SetDocument;
+  dimensions: readonly Dimension[];
+  free: readonly FreeDimension[];
+  check: (document: SetDocument) => FitSheet;
+  ruleBook: RuleBook;
+}
+
+/** What an answer does to everybody; nothing where a piece cannot be so. */
+export function effectsOf(tried: Pick<Tried, 'values'>, ground: Ground): Effects | undefined {
+  const { document, dimensions, free, check, ruleBook } = ground;
+  const next = documentAt(ground, tried.values);
+  if (!next) return undefined;
+  const sheet = check(next);
+  const compared = compareSheets(check(document), sheet);
+  const all = free.flatMap(({ dimensionId }, i): Move[] => {
+    const dimension = dimensions.find(({ id }) => id === dimensionId);
+    return dimension ? [{ dimension, from: dimension.value, to: tried.values[i] as number }] : [];
+  });
+  const isMove = ({ from, to }: Move) => Math.abs(to - from) > SAME;
+  const told = (pick: (one: (typeof compared.sitters)[number]) => ComparedCell[]): PersonEffect[] =>
+    compared.sitters.flatMap((one) => {
+      const checks = pick(one).map(({ ruleId, to }) => `${checkWords(ruleBook, ruleId)} ${stateWords(to)}`);
+      return checks.length > 0 ? [{ sitterId: one.sitterId, name: one.name, checks }] : [];
+    });
+  const piece = ({ ruleId, marks, to }: ComparedCell) =>
+    `${[checkWords(ruleBook, ruleId), marks.join(' and ')].filter(Boolean).join(', ')}: ${stateWords(to)}`;
+  return {
+    document: next,
+    sheet,
+    moves: all.filter(isMove),
+    stays: all.filter((move) => !isMove(move)),
+    better: told(({ gains }) => gains),
+    worse: told(({ losses }) => losses),
+    short: sheet.rows.flatMap((row) => {
+      const checks = shortCells(row).map((cell) => checkWords(ruleBook, cell.ruleId));
+      return checks.length > 0 ? [{ sitterId: row.sitterId, name: row.name, checks }] : [];
+    }),
+    served: sheet.rows.filter((row) => shortCells(row).length === 0).length,
+    of: sheet.rows.length,
+    tight: sheet.counts.tight,
+    piecesBetter: compared.pieces.gains.map(piece),
+    piecesWorse: compared.pieces.losses.map(piece),
+  };
+}

@@ -1,0 +1,2 @@
+export { SuggestPage } from './components/suggest-page.tsx';
+export { SuggestContext } from './suggest-view.ts';

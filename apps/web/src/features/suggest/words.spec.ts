@@ -1,0 +1,102 @@
+import { dimensionsOf } from '@settlewright/geometry';
+import { describe, expect, it } from 'vitest';
+import { effectsOf } from './effects.ts';
+import { clashOf, freeOf, questionOf, startForm, startFreedom } from './search-form.ts';
+import { bay, check, INCHES, ruleBook } from './test/show-suggest.tsx';
+import {
+  blameWords,
+  dimensionWords,
+  servedWords,
+  shareWords,
+  staysWords,
+  stepWords,
+  timeLeftWords,
+} from './words.ts';
+
+const dimensions = dimensionsOf(bay);
+const free = freeOf(startForm(bay), dimensions, INCHES);
+const now = free.map(({ dimensionId }) => dimensions.find(({ id }) => id === dimensionId)?.value ?? 0);
+const ground = { document: bay, dimensions, free, check, ruleBook };
+const lower = effectsOf({ values: now.map((value, n) => (n === 0 ? value - 100 : value)) }, ground);
+if (!lower) throw new Error('The seats cannot be lower.');
+
+describe('words of a choice', () => {
+  it('names the dimensions with their pieces', () => {
+    const both = dimensions.find(({ id }) => id === 'seat-and-tables');
+    expect(both && dimensionWords(both)).toBe('Seat height, pressed: B1 and B2 with T1');
+  });
+
+  it('says what moves and what stays', () => {
+    expect(stepWords(lower.moves, INCHES)).toMatch(/^Suggested: seat height of B1 and B2 .+″ to .+″$/);
+    expect(staysWords(lower.stays)).toBe('Seat depth of B1 and B2 and table height of T1 stay as now.');
+  });
+
+  it('tells the small sitter as better off and the tall one as worse on a lower seat', () => {
+    const of = (people: typeof lower.better, who: string) =>
+      people.find(({ name }) => name === who)?.checks.join(', ') ?? '';
+    expect(of(lower.better, 'Hetty')).toMatch(/seat height (fits|tight)/);
+    expect(of(lower.worse, 'Hetty')).not.toContain('seat height');
+    expect(of(lower.worse, 'Marcus')).toMatch(/seat height won’t fit/);
+  });
+
+  it.each([
+    [{ served: 2, of: 2 }, 'All 2 sitters are at least tight in every check.'],
+    [{ served: 1, of: 2 }, '1 of 2 sitters is at least tight in every check.'],
+    [{ served: 0, of: 2 }, 'None of 2 sitters is at least tight in every check.'],
+    [{ served: 1, of: 1 }, 'The sitter is at least tight in every check.'],
+  ])('%o', (counts, words) => expect(servedWords(counts)).toBe(words));
+
+  it('says shares as about so many of a hundred', () => {
+    expect(shareWords(0.234, 0.002)).toBe('About 23 in 100, now fewer than 1 in 100');
+    expect(shareWords(undefined, 0.2)).toBeUndefined();
+  });
+
+  it('offers a foot rail to whom the seat is too high for', () => {
+    const high = effectsOf({ values: now.map((value, n) => (n === 0 ? value + 60 : value)) }, ground);
+    const blame = { kind: 'sitter', id: 'hetty', left: 2 } as const;
+    const { what, help } = blameWords(blame, {
+      sheet: high?.sheet ?? lower.sheet,
+      ruleBook,
+      show: (mm) => `${Math.round(mm)} mm`,
+    });
+    expect(what).toBe(
+      'Hetty is whom these dimensions serve least: without Hetty 2 checks would still be missed.',
+    );
+    expect(help.join(' ')).toMatch(/Give Hetty a foot rail \d+ mm high/);
+    expect(help.at(-1)).toMatch(/^Seat Hetty elsewhere/);
+  });
+
+  it('tells the time left once it can', () => {
+    expect(timeLeftWords({ done: 5, of: 600 }, 1, 0)).toBe('');
+    expect(timeLeftWords({ done: 100, of: 600 }, 2, 0)).toBe('at most 10 seconds left');
+    expect(timeLeftWords({ done: 350, of: 600 }, 2, 250)).toBe('at most 5 seconds left');
+  });
+});
+
+describe('what may move', () => {
+  it('stays inside the limits of the pieces', () => {
+    for (const dimension of dimensions) {
+      for (const kind of ['range', 'near'] as const) {
+        const { min, max } = startFreedom(dimension, kind);
+        expect(min).toBeGreaterThanOrEqual(dimension.min);
+        expect(max).toBeLessThanOrEqual(dimension.max);
+        expect(min).toBeLessThanOrEqual(dimension.value);
+        expect(max).toBeGreaterThanOrEqual(dimension.value);
+      }
+    }
+  });
+
+  it('never moves one number by two choices', () => {
+    const form = startForm(bay);
+    const clashes = dimensions.filter((one) => clashOf(one, form, dimensions)).map(({ id }) => id);
+    expect(clashes).toContain('seat-and-tables');
+    expect(clashes).toContain('seat-height|b1');
+    expect(clashes).not.toContain('back-lean');
+    expect(clashes).not.toContain('seat-height');
+  });
+
+  it('names another question by another name', () => {
+    expect(questionOf([bay.pieces, 1])).not.toBe(questionOf([bay.pieces, 2]));
+    expect(questionOf([bay.pieces, 1])).toBe(questionOf([structuredClone(bay.pieces), 1]));
+  });
+});

@@ -1,0 +1,170 @@
+import type { FitSheet, RuleBook } from '@settlewright/anthropometry';
+import type { Blame, Dimension, LengthStyle, SetDocument, Suggestion } from '@settlewright/geometry';
+import {
+  aboutInHundred,
+  dimensionValue,
+  exactValue,
+  firstName,
+  joinWords,
+  markWords,
+} from '@/lib/dimension-words.ts';
+import { checkWords, shortCells, type Effects, type Move, type PersonEffect } from './effects.ts';
+
+/** How a dimension stands in the list: "Seat height, pressed: B1 to B4 with T1 and T2". */
+export function dimensionWords({ label, marks, tableMarks }: Dimension): string {
+  const tables = tableMarks.length > 0 ? ` with ${markWords(tableMarks)}` : '';
+  return `${label}: ${markWords(marks)}${tables}`;
+}
+
+/** "Seat height of B1 to B4" inside a sentence. */
+function subject({ label, marks, tableMarks }: Dimension): string {
+  const name = label.replace(', pressed', '').toLowerCase();
+  const tables = tableMarks.length > 0 ? ` with ${markWords(tableMarks)}` : '';
+  return `${name} of ${markWords(marks)}${tables}`;
+}
+
+const capital = (text: string): string => text.charAt(0).toUpperCase() + text.slice(1);
+
+/** The parts of an answer's sentence: words and numbers, so that numbers can be set as such. */
+export interface MoveWords {
+  id: string;
+  subject: string;
+  from: string;
+  to: string;
+}
+
+export function moveWords({ dimension, from, to }: Move, style: LengthStyle): MoveWords {
+  return {
+    id: dimension.id,
+    subject: subject(dimension),
+    from: dimensionValue(from, dimension.unit, style),
+    to: exactValue(to, dimension.unit, style),
+  };
+}
+
+/** "Seat depth of B1 to B4 and table height of T1 stay." */
+export function staysWords(stays: readonly Move[]): string {
+  if (stays.length === 0) return '';
+  return `${capital(joinWords(stays.map(({ dimension }) => subject(dimension))))} ${stays.length === 1 ? 'stays' : 'stay'} as now.`;
+}
+
+/** Name of the undo step: "Suggested: seat height of B1 to B4 18″ to 17″ and 2 more". */
+export function stepWords(moves: readonly Move[], style: LengthStyle): string {
+  const [first, ...rest] = moves.map((move) => moveWords(move, style));
+  if (!first) return 'Suggested dimensions';
+  const more = rest.length > 0 ? ` and ${rest.length} more` : '';
+  return `Suggested: ${first.subject} ${first.from} to ${first.to}${more}`;
+}
+
+/** "Hetty: seat height fits, table height tight". */
+export const personWords = ({ name, checks }: PersonEffect): string =>
+  `${firstName(name)}: ${checks.join(', ')}`;
+
+/** How many people an answer serves: "All six are at least tight in every check." */
+export function servedWords({ served, of }: Pick<Effects, 'served' | 'of'>): string {
+  if (of === 0) return 'Nobody is seated.';
+  if (served === of)
+    return of === 1
+      ? 'The sitter is at least tight in every check.'
+      : `All ${of} sitters are at least tight in every check.`;
+  if (served === 0) return `None of ${of} sitters is at least tight in every check.`;
+  return `${served} of ${of} sitters ${served === 1 ? 'is' : 'are'} at least tight in every check.`;
+}
+
+/** The share of a crowd with an answer, and now. */
+export function shareWords(then: number | undefined, now: number | undefined): string | undefined {
+  if (then === undefined) return undefined;
+  const before = now === undefined ? '' : `, now ${aboutInHundred(now)}`;
+  return `${capital(aboutInHundred(then))}${before}`;
+}
+
+/** Who or what stands in the way of an answer that serves all, and what would help. */
+export interface BlameWords {
+  what: string;
+  help: string[];
+}
+
+interface Ground {
+  sheet: FitSheet;
+  ruleBook: RuleBook;
+  show: (mm: number) => string;
+}
+
+export function blameWords(blame: Blame, { sheet, ruleBook, show }: Ground): BlameWords {
+  const left =
+    blame.left === 0
+      ? 'nothing would be missed'
+      : `${blame.left} ${blame.left === 1 ? 'check' : 'checks'} would still be missed`;
+  const rails = footRails(sheet, show);
+  if (blame.kind === 'rule') {
+    const who = sheet.rows.filter((row) => shortCells(row).some(({ ruleId }) => ruleId === blame.id));
+    const names = joinWords(who.map(({ name }) => firstName(name)));
+    return {
+      what: `${ruleBook.rule(blame.id).columnName} is what stands most in the way${names ? `, for ${names}` : ''}: without it ${left}.`,
+      help: [
+        ...rails,
+        `Let something move that ${checkWords(ruleBook, blame.id)} hangs on, or keep it with a note.`,
+      ],
+    };
+  }
+  const row = sheet.rows.find(({ sitterId }) => sitterId === blame.id);
+  const name = row ? firstName(row.name) : 'One sitter';
+  const unknown = row?.cells.some(
+    ({ outcome }) => outcome.kind === 'verdict' && outcome.verdict === 'notKnown',
+  );
+  return {
+    what: `${name} is whom these dimensions serve least: without ${name} ${left}.`,
+    help: [
+      ...rails,
+      ...(unknown ? [`Measure ${name}: some of the checks are not known.`] : []),
+      `Seat ${name} elsewhere, where the numbers differ.`,
+    ],
+  };
+}
+
+const SEAT_HEIGHT = 'SEAT-02';
+
+/** Whose feet a rail would bring in: the seat is too high for them by so much. */
+function footRails({ rows }: FitSheet, show: (mm: number) => string): string[] {
+  return rows.flatMap(({ name, cells }) => {
+    const outcome = cells.find(({ ruleId }) => ruleId === SEAT_HEIGHT)?.outcome;
+    if (outcome?.kind !== 'verdict' || outcome.verdict !== 'wontFit') return [];
+    const { value, fail, pass } = outcome;
+    if (fail.upper === undefined || value <= fail.upper) return [];
+    return [
+      `Give ${firstName(name)} a foot rail ${show(value - (pass.upper ?? fail.upper))} high: the seat is too high by that.`,
+    ];
+  });
+}
+
+/** What the known differences will say of the choice not taken. */
+export function differenceWords(moves: readonly Move[], style: LengthStyle): string {
+  const kept = moves.map((move) => {
+    const { subject: of, from, to } = moveWords(move, style);
+    return `${of} kept at ${from} (suggested ${to})`;
+  });
+  return kept.length === 0 ? 'Dimensions kept as they are' : capital(joinWords(kept));
+}
+
+/** The set with the choice written into its known differences. */
+export function withDifference(
+  document: SetDocument,
+  said: { id: string; text: string; reason: string; by: string | undefined; on: string },
+): SetDocument {
+  const { id, text, reason, by, on } = said;
+  const added = { id, text, ...(reason ? { reason } : {}), ...(by ? { by } : {}), on };
+  return { ...document, knownDifferences: [...document.knownDifferences, added] };
+}
+
+/** "about 4 seconds left"; nothing before it can be told. */
+export function timeLeftWords(
+  { done, of }: Pick<Suggestion, 'done' | 'of'>,
+  seconds: number,
+  knownAtStart: number,
+): string {
+  const tried = done - knownAtStart;
+  if (tried < 20) return '';
+  const left = Math.ceil((seconds / tried) * Math.max(0, of - done));
+  if (left > 90) return `at most ${Math.ceil(left / 60)} minutes left`;
+  return left <= 1 ? 'nearly done' : `at most ${left} seconds left`;
+}

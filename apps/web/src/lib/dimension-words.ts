@@ -1,0 +1,45 @@
+import {
+  formatAngle,
+  formatExactLength,
+  formatLength,
+  type Dimension,
+  type LengthStyle,
+} from '@settlewright/geometry';
+
+/** A value of a dimension, rounded for show. */
+export function dimensionValue(value: number, unit: Dimension['unit'], style: LengthStyle): string {
+  if (unit === 'mm') return formatLength(value, style);
+  return unit === 'deg' ? formatAngle(value) : `${Math.round(value)}\u202fN`;
+}
+
+/** A value somebody will build to, never shown as another one. */
+export function exactValue(value: number, unit: Dimension['unit'], style: LengthStyle): string {
+  return unit === 'mm' ? formatExactLength(value, style) : dimensionValue(value, unit, style);
+}
+
+/** "Ottilie, Hetty and Wren", each once. */
+export const joinWords = (words: readonly string[]): string =>
+  new Intl.ListFormat('en-GB', { type: 'conjunction' }).format([...new Set(words)]);
+
+/** "B1 to B4", "B1 and B3": marks that follow each other are said as a run. */
+export function markWords(marks: readonly string[]): string {
+  const numbers = marks.map((mark) => Number(mark.replace(/\D+/, '')));
+  const letters = new Set(marks.map((mark) => mark.replace(/\d+/, '')));
+  const inARow = numbers.every((number, n) => n === 0 || number === (numbers[n - 1] as number) + 1);
+  if (marks.length > 2 && letters.size === 1 && inARow) return `${marks[0]} to ${marks.at(-1)}`;
+  return joinWords(marks);
+}
+
+/** First name for lines where room is short; a mannequin keeps "Woman, 5th". */
+export function firstName(name: string): string {
+  const [mannequin] = /^(Woman|Man), \d+\w\w/.exec(name) ?? [];
+  return mannequin ?? name.split(' ')[0] ?? name;
+}
+
+/** "about 23 in 100", "fewer than 1 in 100". */
+export function aboutInHundred(share: number): string {
+  const n = Math.round(share * 100);
+  if (n === 0) return share > 0 ? 'fewer than 1 in 100' : 'nobody';
+  if (n === 100 && share < 1) return 'more than 99 in 100';
+  return `about ${n} in 100`;
+}
