@@ -54,6 +54,9 @@ export function FitPage({ roomTo, papersAt }: FitPageProps) {
           <>
             <Button onClick={() => fetchPaper('pdf')}>Print, PDF</Button>
             <Button onClick={() => fetchPaper('csv')}>Table, CSV</Button>
+            <Link className="link self-center" to={`${roomTo}/crowd`}>
+              Who fits
+            </Link>
             <Link className="link self-center" to={roomTo}>
               Back to the room
             </Link>

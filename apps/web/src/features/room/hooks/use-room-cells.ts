@@ -36,6 +36,8 @@ export function useRoomCells(lastRevision: Issued | null | undefined, canEdit: b
         menu: [
           { id: 'room', words: 'The room', to: home },
           { id: 'fit', words: 'Fit sheet', to: `${home}/fit` },
+          { id: 'crowd', words: 'Who fits', to: `${home}/crowd` },
+          ...(canEdit ? [{ id: 'suggest', words: 'Suggest dimensions', to: `${home}/suggest` }] : []),
           { id: 'revisions', words: 'Revisions', to: `${home}/revisions` },
         ],
         name: `Set: ${setName}, menu`,
