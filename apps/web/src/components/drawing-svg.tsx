@@ -1,4 +1,5 @@
 import type { Drawing, DrawShape, Fill, Pen } from '@settlewright/geometry';
+import type { ReactNode } from 'react';
 
 /** Pens in pixels on the screen; drawings keep them whatever their scale. */
 const PENS: Record<Pen, number> = { hair: 0.75, fine: 0.9, edge: 1.1, outline: 2, cut: 3 };
@@ -54,6 +55,10 @@ function Shape({ shape }: { shape: DrawShape }) {
   }
 }
 
+/** Shapes of a drawing over another one, whose element sets the scale. */
+export const DrawnShapes = ({ shapes }: { shapes: readonly DrawShape[] }) =>
+  shapes.map((shape, index) => <Shape key={index} shape={shape} />);
+
 interface DrawingSvgProps {
   drawing: Drawing;
   /** Pixels for a millimetre, the same for all drawings that stand together. */
@@ -61,10 +66,12 @@ interface DrawingSvgProps {
   /** What it shows, for a screen reader; without it the drawing is decoration beside its words. */
   label?: string;
   className?: string;
+  /** Painted over the drawing, in its millimetres. */
+  children?: ReactNode;
 }
 
 /** A drawing of the geometry library on the screen, at a stated scale. */
-export function DrawingSvg({ drawing, pxPerMm, label, className }: DrawingSvgProps) {
+export function DrawingSvg({ drawing, pxPerMm, label, className, children }: DrawingSvgProps) {
   const { x, y, width, height } = drawing.boundsMm;
   const pad = 2 / pxPerMm;
   return (
@@ -75,9 +82,8 @@ export function DrawingSvg({ drawing, pxPerMm, label, className }: DrawingSvgPro
       className={className}
       {...(label === undefined ? { 'aria-hidden': true } : { role: 'img', 'aria-label': label })}
     >
-      {drawing.shapes.map((shape, index) => (
-        <Shape key={index} shape={shape} />
-      ))}
+      <DrawnShapes shapes={drawing.shapes} />
+      {children}
     </svg>
   );
 }

@@ -28,7 +28,7 @@ export function LengthField({ minMm, maxMm, feet, ...field }: LengthFieldProps) 
   const other = format.style.system === 'millimetres' ? { ...INCHES, feet } : MILLIMETRES;
 
   const read = (text: string): Reading => {
-    const reading = parseLength(text, format.bareUnit);
+    const reading = parseLength(text, format.bareUnit, { negative: minMm < 0 });
     if (!reading.ok) {
       const offers = reading.error.readings
         ?.filter((mm) => mm >= minMm && mm <= maxMm)

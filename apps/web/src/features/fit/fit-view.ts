@@ -21,10 +21,12 @@ export interface FitView {
   /** Absent when the document cannot be changed here. */
   fixesFor?: (cell: FitCell) => Fix[];
   take?: (fix: Fix) => void;
+  /** The set itself, for its plan. */
+  document?: SetDocument;
   /** What the set says about itself; absent where it is not told. */
   asked?: SetDocument['asked'];
   /** Absent when the document cannot be changed here. */
-  ask?: (asked: SetDocument['asked']) => void;
+  ask?: (asked: SetDocument['asked'], doing?: string) => void;
 }
 
 export const FitViewContext = createContext<FitView | null>(null);

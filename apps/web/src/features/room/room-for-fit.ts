@@ -31,7 +31,7 @@ export interface RoomForFit {
   fixesFor?: (cell: FitCell) => Fix[];
   take?: (fix: Fix) => void;
   asked: SetDocument['asked'];
-  ask?: (asked: SetDocument['asked']) => void;
+  ask?: (asked: SetDocument['asked'], doing?: string) => void;
   clientView: boolean;
   drawerOpen: boolean;
   openDrawer: (open: boolean) => void;
@@ -74,8 +74,8 @@ export function useRoomForFit(): RoomForFit {
       open: (cellId) => store.getState().openCell(cellId),
       asked: picture.document.asked,
       ...(canEdit && {
-        ask: (asked: SetDocument['asked']) =>
-          actions.replace({ ...picture.document, asked }, 'What this set asks'),
+        ask: (asked: SetDocument['asked'], doing = 'What this set asks') =>
+          actions.replace({ ...picture.document, asked }, doing),
         fixesFor: (cell: FitCell) => suggestFixes({ document: picture.document, cell, check: maker.check }),
         take: (fix: Fix) => {
           const show = (mm: number) => formatLength(mm, style);

@@ -1,10 +1,10 @@
 import type { SetDocument } from '@settlewright/geometry';
-import { useState } from 'react';
 import { Disclosure } from '@/components/disclosure.tsx';
-import { LengthField } from '@/components/length-field.tsx';
-import type { QuantityEntry } from '@/components/quantity-entry.ts';
 import { Select } from '@/components/select.tsx';
+import { without } from '../asked.ts';
 import { useFitView } from '../fit-view.ts';
+import { AskedFloor } from './asked-floor.tsx';
+import { SaidLength } from './said-length.tsx';
 
 type Asked = SetDocument['asked'];
 
@@ -31,40 +31,6 @@ const SPACES = [
 const MOST_LENS_MM = 4000;
 const MOST_DOOR_MM = 5000;
 const MOST_DEPTH_MM = 2000;
-
-/** A setting with an absent value is not asked about. */
-function without<K extends keyof Asked>(asked: Asked, key: K): Asked {
-  const rest = { ...asked };
-  delete rest[key];
-  return rest;
-}
-
-interface LengthProps {
-  label: string;
-  valueMm: number | undefined;
-  maxMm: number;
-  onSay: (valueMm: number | undefined) => void;
-}
-
-/** A length that is said when the field is left; empty takes it back. */
-function SaidLength({ label, valueMm, maxMm, onSay }: LengthProps) {
-  const [entry, setEntry] = useState<QuantityEntry>({ value: valueMm ?? null });
-  return (
-    <LengthField
-      label={label}
-      optional
-      entry={entry}
-      error={entry.problem}
-      minMm={0}
-      maxMm={maxMm}
-      onChange={setEntry}
-      onBlur={() => {
-        const said = entry.value ?? undefined;
-        if (entry.problem === undefined && said !== valueMm) onSay(said);
-      }}
-    />
-  );
-}
 
 /** What the set says about itself, so that more rules can be asked of it. */
 export function AskedForm() {
@@ -93,6 +59,7 @@ export function AskedForm() {
           />
           <SaidLength
             label="Height of the lens"
+            optional
             valueMm={asked.lensHeightMm}
             maxMm={MOST_LENS_MM}
             onSay={(lensHeightMm) =>
@@ -113,6 +80,7 @@ export function AskedForm() {
           />
           <SaidLength
             label="Clear width of the door"
+            optional
             valueMm={door?.clearWidthMm}
             maxMm={MOST_DOOR_MM}
             onSay={(clearWidthMm) => sayDoor({ clearWidthMm: clearWidthMm ?? 0 })}
@@ -120,6 +88,7 @@ export function AskedForm() {
           {door !== undefined && (
             <SaidLength
               label="Depth of the door opening"
+              optional
               valueMm={door.depthMm}
               maxMm={MOST_DEPTH_MM}
               onSay={(depthMm) => sayDoor({ depthMm: depthMm ?? 0 })}
@@ -138,6 +107,7 @@ export function AskedForm() {
             }
           />
         </div>
+        <AskedFloor />
       </Disclosure>
     </div>
   );

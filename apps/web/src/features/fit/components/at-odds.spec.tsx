@@ -1,8 +1,6 @@
-import { fireEvent, screen, within } from '@testing-library/react';
-import userEvent from '@testing-library/user-event';
-import { describe, expect, it, vi } from 'vitest';
+import { screen, within } from '@testing-library/react';
+import { describe, expect, it } from 'vitest';
 import { check, facingBenches, ruleBook, showSheet } from '../test/show-sheet.tsx';
-import { AskedForm } from './asked-form.tsx';
 import { AtOdds } from './at-odds.tsx';
 import { PiecesAndWays } from './pieces-and-ways.tsx';
 
@@ -41,31 +39,5 @@ describe('what is not asked', () => {
       .map((id) => ruleBook.rule(id).columnName)
       .join(', ');
     expect(screen.getByText(`${bench}: no bench is marked accessible`)).toBeVisible();
-  });
-});
-
-describe('what a set says of itself', () => {
-  const open = async () => {
-    const ask = vi.fn();
-    const user = userEvent.setup();
-    showSheet(<AskedForm />, { asked: facingBenches.asked, ask });
-    await user.click(screen.getByRole('button', { name: 'What this set asks' }));
-    return { ask, user };
-  };
-
-  it('takes the height of the lens when the field is left', async () => {
-    const { ask, user } = await open();
-    const field = screen.getByLabelText(/^Height of the lens/);
-    await user.type(field, '3 6');
-    expect(ask).not.toHaveBeenCalled();
-    await user.clear(field);
-    await user.type(field, '42');
-    fireEvent.blur(field);
-    expect(ask.mock.calls).toEqual([[{ ...facingBenches.asked, lensHeightMm: 42 * 25.4 }]]);
-  });
-
-  it('is not shown to those who change nothing', () => {
-    showSheet(<AskedForm />, { asked: facingBenches.asked });
-    expect(screen.queryByRole('button')).toBeNull();
   });
 });

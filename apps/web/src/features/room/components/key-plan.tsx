@@ -1,6 +1,15 @@
 import { Radio, RadioGroup } from '@headlessui/react';
-import { footprint, formatLength, placeFrames, type Piece } from '@settlewright/geometry';
-import { useMemo } from 'react';
+import { ruleNumber } from '@settlewright/anthropometry';
+import {
+  askedShapes,
+  drawingOf,
+  footprint,
+  formatLength,
+  placeFrames,
+  type DrawShape,
+  type Piece,
+} from '@settlewright/geometry';
+import { DrawnShapes } from '@/components/drawing-svg.tsx';
 import { Measure } from '@/components/measure.tsx';
 import { RuleHeading } from '@/components/rule-heading.tsx';
 import type { RoomAddress } from '../hooks/use-address.ts';
@@ -34,9 +43,11 @@ interface Props {
 
 /** The plan to scale, with the eyes from which the room can be seen. */
 export function KeyPlan({ picture, address }: Props) {
-  const { style } = useSurroundings();
+  const { engine, style } = useSurroundings();
   const { document, bodies } = picture;
-  const plan = useMemo(() => planOfSet(document.pieces), [document.pieces]);
+  const asked = askedShapes(document.asked, ruleNumber(engine.ruleBook.rule('ACC-08'), 'circle'));
+  const plan = planOfSet(document.pieces, asked);
+  const pieces = planOfSet(document.pieces);
   const { minX, maxX, minZ, maxZ } = plan;
   const scale = Math.min((WIDTH - LEFT - 6) / (maxX - minX), TALLEST / (maxZ - minZ));
   const height = (maxZ - minZ) * scale;
@@ -71,7 +82,7 @@ export function KeyPlan({ picture, address }: Props) {
         id="plan-heading"
         aside={
           <span className="text-sm text-ink-3">
-            <Measure text={formatLength(maxX - minX, { ...style, feet: true })} />
+            <Measure text={formatLength(pieces.maxX - pieces.minX, { ...style, feet: true })} />
           </span>
         }
       >
@@ -107,6 +118,9 @@ export function KeyPlan({ picture, address }: Props) {
               stroke="var(--color-pen)"
             />
           ))}
+          <g transform={`translate(${x(0)} ${z(0)}) scale(${scale})`}>
+            <DrawnShapes shapes={asked} />
+          </g>
           {cutX !== undefined && address.view === 'C' && (
             <path
               d={`M${cutX} 2V${height + 14}`}
@@ -136,14 +150,16 @@ export function KeyPlan({ picture, address }: Props) {
   );
 }
 
-function planOfSet(pieces: readonly Piece[]) {
+function planOfSet(pieces: readonly Piece[], asked: DrawShape[] = []) {
   const corners = pieces.flatMap((piece) => footprint(piece).corners);
   const xs = corners.map(([cx]) => cx);
   const zs = corners.map(([, cz]) => cz);
+  // Without shapes the bounds are a point at the origin.
+  const { x, y, width, height } = drawingOf(asked).boundsMm;
   return {
-    minX: Math.min(...xs, 0),
-    maxX: Math.max(...xs, 100),
-    minZ: Math.min(...zs, 0),
-    maxZ: Math.max(...zs, 100),
+    minX: Math.min(...xs, x, 0),
+    maxX: Math.max(...xs, x + width, 100),
+    minZ: Math.min(...zs, y, 0),
+    maxZ: Math.max(...zs, y + height, 100),
   };
 }
