@@ -1,4 +1,4 @@
-import type { TapeMeasureKey } from '@settlewright/anthropometry';
+import type { ShareOutcome, TapeMeasureKey } from '@settlewright/anthropometry';
 import type { SetDocument } from '@settlewright/geometry';
 import type { components } from './api-types.ts';
 
@@ -39,6 +39,10 @@ export type CastMember = Schema['CastNameDto'] &
     measured?: Partial<Record<TapeMeasureKey, TapeReading>>;
   };
 
+/** What to measure next of each person who sits in a set of the production. */
+export type MeasureNext = Schema['MeasureNextDto'];
+export type PersonNext = MeasureNext['items'][number];
+
 /** A text that somebody typed with a person's name in it. */
 export type NamedPlace = Schema['NamedPlaceDto'];
 export type NamedPlaces = Schema['NamedPlacesDto'];
@@ -49,6 +53,12 @@ export type ImportResult = Schema['CastImportDto'];
 /** The document travels as plain JSON; the geometry library says what it is. */
 export type SetSummary = Omit<Schema['SetDto'], 'document'> & { document: SetDocument };
 export type Draft = Omit<Schema['DraftDto'], 'document'> & { document: SetDocument };
+
+/** A count of many people on the server. */
+export type ServerStudy = Omit<Schema['ListedStudyDto'], 'outcome'> & { outcome?: ShareOutcome };
+export type OwnSurvey = Schema['PopulationDto'];
+export type SurveyPreview = Schema['PopulationPreviewDto'];
+export type SurveyMapping = Schema['MappingDto'];
 
 export type OrderState = Schema['OrderState'];
 export type OrderSummary = Schema['OrderSummaryDto'];

@@ -5,6 +5,9 @@ import { createContext, useContext } from 'react';
 /** What the page of shares reads; the route that composes it provides it. */
 export interface CrowdView {
   setName: string;
+  /** Address of the set on the server, and the draft that the server has. */
+  setAt: string;
+  draftNumber: number;
   document: SetDocument;
   ruleBook: RuleBook;
 }

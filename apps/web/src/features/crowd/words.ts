@@ -38,3 +38,9 @@ export function rejectionWords(
 
 /** What everybody of the crowd wears. */
 export const WEAR_WORDS = `Everybody wears shoes of ${CROWD_WEAR.shoeMm} mm and ${CROWD_WEAR.clothing} clothes, sits upright with the back against the rest, and presses the cushion by their own weight.`;
+
+const tenth = (share: number): string => (share * 100).toFixed(1);
+
+/** "About 34.2 (34.1 to 34.3)", for counts so large that tenths mean something. */
+export const fineRange = ({ value, low, high }: Share): string =>
+  `About ${tenth(value)} (${tenth(low)} to ${tenth(high)})`;

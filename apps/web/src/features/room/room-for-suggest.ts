@@ -1,13 +1,18 @@
 import type { FitSheet, RuleBook, Sitter } from '@settlewright/anthropometry';
 import type { LengthStyle, SetDocument } from '@settlewright/geometry';
 import { useMemo } from 'react';
+import { useStore } from 'zustand';
+import { setAddress } from './api.ts';
 import { useTakeStep } from './hooks/use-take-step.ts';
-import { usePicture, useSurroundings } from './room-context.tsx';
+import { useAutosave, usePicture, useSurroundings } from './room-context.tsx';
 import { sitterColour, sittersOf } from './sitters.ts';
 
 /** What the pages about suggestions and shares need of the room; the route hands it on. */
 export interface RoomForSuggest {
   setId: string;
+  /** Address of the set on the server, and the draft that the server has. */
+  setAt: string;
+  draftNumber: number;
   setName: string;
   document: SetDocument;
   sheet: FitSheet;
@@ -25,11 +30,14 @@ export function useRoomForSuggest(): RoomForSuggest {
   const { path, engine, style, canEdit, cast, maker, setName } = useSurroundings();
   const { document, sheet } = usePicture();
   const take = useTakeStep();
+  const draftNumber = useStore(useAutosave().state, (state) => state.base.number);
   return useMemo(() => {
     const seatOf = new Map(document.seating.map((seat) => [`${seat.pieceId}:${seat.place}`, seat.sitter]));
     const placeOf = new Map(sheet.rows.map((row) => [row.sitterId, row.placeId]));
     return {
       setId: path.setId,
+      setAt: setAddress(path),
+      draftNumber,
       setName,
       document,
       sheet,
@@ -43,5 +51,5 @@ export function useRoomForSuggest(): RoomForSuggest {
         return sitter ? sitterColour(sitter, cast) : 6;
       },
     };
-  }, [path, setName, document, sheet, maker, canEdit, take, cast, engine, style]);
+  }, [path, draftNumber, setName, document, sheet, maker, canEdit, take, cast, engine, style]);
 }

@@ -21,9 +21,13 @@ vi.mock('@/lib/crowd/ask-crowd.ts', () => ({
 const bay = ARRANGEMENTS.find(({ id }) => id === 'facing-benches')?.build() as SetDocument;
 const ruleBook = loadRuleBook(rules);
 
+let studies: unknown[] = [];
+
 beforeEach(() => {
   signInAs('owner');
+  studies = [];
   server.use(
+    http.get('*/sets/1/studies', () => HttpResponse.json({ items: studies })),
     http.get('*/populations', () => HttpResponse.json({ items: [], total: 0, page: 1, pageSize: 200 })),
   );
 });
@@ -31,7 +35,7 @@ beforeEach(() => {
 function show(document: SetDocument = bay, search = '') {
   const user = userEvent.setup();
   const page = (
-    <CrowdContext value={{ setName: 'Dining car', document, ruleBook }}>
+    <CrowdContext value={{ setName: 'Dining car', setAt: '/sets/1', draftNumber: 41, document, ruleBook }}>
       <CrowdPage roomTo="/room" fitTo="/fit" />
     </CrowdContext>
   );
@@ -69,6 +73,63 @@ describe('who fits', () => {
     expect(await screen.findByText(/in 100 fit all checks at once/)).toBeVisible();
     expect(screen.getByRole('slider', { name: 'Women of 100 people' })).toHaveValue('0');
     expect(screen.getByRole('region', { name: 'About these people' })).toHaveTextContent(/soldiers/i);
+  });
+
+  it('has a million counted on the server, shows how far it is, and cancels it', async () => {
+    const sent: unknown[] = [];
+    const study = {
+      id: 's1',
+      state: 'running',
+      progress: { blocks: 40, done: 12 },
+      draftNumber: 41,
+      population: { id: 'us-civilians-2015', name: 'US adults 2015', cautions: [] },
+      womenPercent: 50,
+      people: 1_000_000,
+      startedBy: { id: 'u1', name: 'Nell Abara' },
+      startedAt: '2026-01-20T10:00:00Z',
+    };
+    server.use(
+      http.post('*/sets/1/studies', async ({ request }) => {
+        sent.push(await request.json());
+        studies = [study];
+        return HttpResponse.json(study, { status: 201 });
+      }),
+      http.post('*/sets/1/studies/s1/cancel', () => {
+        studies = [{ ...study, state: 'cancelled' }];
+        return HttpResponse.json({ ...study, state: 'cancelled' });
+      }),
+    );
+    const { user } = show();
+    await user.click(await screen.findByRole('button', { name: 'Count a million' }));
+    const board = await screen.findByRole('progressbar', { name: 'Counting a million' });
+    expect(board).toHaveAttribute('aria-valuetext', '12 of 40 parts counted');
+    expect(sent).toEqual([
+      { populationId: 'us-civilians-2015', womenPercent: 50, people: 1_000_000, draftNumber: 41 },
+    ]);
+    await user.click(screen.getByRole('button', { name: 'Cancel' }));
+    await waitFor(() => expect(screen.queryByRole('progressbar')).toBeNull());
+  });
+
+  it('shows what was counted to a reader, without a button', async () => {
+    signInAs('reviewer');
+    studies = [
+      {
+        id: 's1',
+        state: 'done',
+        progress: { blocks: 40, done: 40 },
+        draftNumber: 40,
+        population: { id: 'us-civilians-2015', name: 'US adults 2015', cautions: [] },
+        people: 1_000_000,
+        startedBy: { id: 'u1', name: 'Nell Abara' },
+        startedAt: '2026-01-20T10:00:00Z',
+        outcome: { kind: 'shares', fits: { mixed: { value: 0.3424, low: 0.3415, high: 0.3433 } } },
+      },
+    ];
+    show();
+    expect(
+      await screen.findByText(/About 34.2 \(34.2 to 34.3\) in 100 fit all checks at once/),
+    ).toBeVisible();
+    expect(screen.queryByRole('button', { name: 'Count a million' })).toBeNull();
   });
 
   it('says what is missing where there is no place to sit', () => {

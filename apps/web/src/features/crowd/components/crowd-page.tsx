@@ -14,6 +14,7 @@ import { useShares, type Shares } from '../use-shares.ts';
 import { ofHundred, rejectionWords } from '../words.ts';
 import { AllAtOnce } from './all-at-once.tsx';
 import { CheckShares } from './check-shares.tsx';
+import { CountMillion } from './count-million.tsx';
 import { CrowdCaution } from './crowd-caution.tsx';
 import { PlaceShares } from './place-shares.tsx';
 
@@ -118,6 +119,7 @@ function Counted() {
             onTick={(ids) => setUnticked(new Set(all.filter((id) => !ids.includes(id))))}
           />
           <PlaceShares places={joint.shares.places} />
+          {ticked.size > 0 && <CountMillion crowd={crowd} ruleIds={isPart ? [...ticked] : undefined} />}
           <CrowdCaution shares={every.shares} />
         </div>
       )}

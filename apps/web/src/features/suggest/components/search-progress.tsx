@@ -1,7 +1,7 @@
 import { Button } from '@/components/button.tsx';
 import type { SearchRun } from '../use-search.ts';
 import { timeLeftWords } from '../words.ts';
-import { SawBoard } from './saw-board.tsx';
+import { SawBoard } from '@/components/saw-board.tsx';
 
 /** The board sawn so far, what was tried, the time left, and the way to stop. */
 export function SearchProgress({ run, onStop }: { run: SearchRun; onStop: () => void }) {
