@@ -206,6 +206,17 @@ describe('a population', () => {
     expect(body.fields[0].path).toBe(field);
   });
 
+  it.each([
+    ['measures.0', { ...SURVEY_MAPPING, measures: [null] }],
+    ['a unit', { ...SURVEY_MAPPING, measures: [{ key: 'stature', column: 'Weight', unit: 'ell' }] }],
+    ['sex', { ...SURVEY_MAPPING, sex: [] }],
+    ['no sex', { ...SURVEY_MAPPING, sex: null }],
+    ['no mapping', null],
+  ])('is not made with a mapping that is none: %s', async (_what, mapping) => {
+    const { body } = await as(test, owner).post(path).send(surveyBody({ mapping })).expect(400);
+    expect(body.fields[0].path).toMatch(/^mapping/);
+  });
+
   it('is studied like any other, told by its own words, and its studies outlive it', async () => {
     const workshop = { id: path.split('/')[2] ?? '', owner };
     const place = await createSet(test, await createProduction(test, {}, workshop));

@@ -144,6 +144,15 @@ describe('a short study', () => {
   });
 });
 
+describe('what is sent as null', () => {
+  it('counts as not sent', async () => {
+    const nothing = { seed: null, ruleIds: null, placeIds: null, revisionLetter: null, womenPercent: null };
+    const study = await start({ ...nothing, people: 300, populationId: 'german' });
+    expect(study).toMatchObject({ state: 'done', seed: 1 });
+    expect(study).not.toHaveProperty('womenPercent');
+  });
+});
+
 describe('a question that cannot be counted', () => {
   it.each([
     [

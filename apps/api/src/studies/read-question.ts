@@ -20,16 +20,16 @@ export function readQuestion(
   const faults = [
     ...placeFaults(dto.placeIds, places),
     ...strangers('ruleIds', dto.ruleIds, [...RULES], 'no rule asked of one sitter has the id'),
-    ...mixFaults(dto.womenPercent, groups),
+    ...mixFaults(dto.womenPercent ?? undefined, groups),
   ];
   if (faults.length > 0) throw Problem.invalid(faults);
-  const { people, seed = 1, ruleIds, placeIds } = dto;
+  const { people, ruleIds, placeIds } = dto;
   const { lensHeightMm } = document.asked;
   return {
     crowd,
     ...(groups.length > 1 ? { womenShare: (dto.womenPercent ?? EVENLY) / WHOLE } : {}),
     people,
-    seed,
+    seed: dto.seed ?? 1,
     blockPeople,
     places,
     ...(lensHeightMm === undefined ? {} : { lensHeightMm }),

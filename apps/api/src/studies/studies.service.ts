@@ -110,12 +110,13 @@ export class StudiesService {
     setId: string,
     { draftNumber, revisionLetter }: StartStudyDto,
   ): Promise<SetDocument> {
-    if ((draftNumber === undefined) === (revisionLetter === undefined)) {
-      const read = draftNumber === undefined ? 'neither' : 'both';
+    const given = [draftNumber, revisionLetter].filter((one) => one !== undefined && one !== null);
+    if (given.length !== 1) {
+      const read = given.length === 0 ? 'neither' : 'both';
       const message = `read ${read}; accepted: the number of the draft or the letter of a revision`;
       throw Problem.invalid([{ path: 'draftNumber', code: 'one-document', message }]);
     }
-    if (revisionLetter !== undefined) {
+    if (typeof revisionLetter === 'string') {
       return (await this.revisions.find(member, productionId, setId, revisionLetter)).document;
     }
     const draft = await this.drafts.get(member, productionId, setId);

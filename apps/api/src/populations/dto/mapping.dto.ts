@@ -6,6 +6,7 @@ import {
   IsArray,
   IsBoolean,
   IsIn,
+  IsObject,
   IsOptional,
   IsString,
   MaxLength,
@@ -62,7 +63,10 @@ export class MeasureColumnDto {
 
 /** Which column holds what. */
 export class MappingDto implements Mapping {
+  // Its absence is among the problems of a preview.
   @ApiProperty({ type: SexColumnDto })
+  @IsOptional()
+  @IsObject()
   @ValidateNested()
   @Type(() => SexColumnDto)
   sex: SexColumnDto;
@@ -76,6 +80,7 @@ export class MappingDto implements Mapping {
   @ApiProperty({ type: [MeasureColumnDto], description: 'stature and weight_kg among them' })
   @IsArray()
   @ArrayMaxSize(MEASURE_KEYS.length)
+  @IsObject({ each: true })
   @ValidateNested({ each: true })
   @Type(() => MeasureColumnDto)
   measures: MeasureColumnDto[];

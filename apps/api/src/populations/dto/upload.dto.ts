@@ -1,7 +1,7 @@
 import { MEASURE_KEYS, type MeasureKey } from '@settlewright/anthropometry';
 import { ApiProperty, ApiPropertyOptional } from '@nestjs/swagger';
 import { Type } from 'class-transformer';
-import { IsBoolean, IsDefined, IsOptional, IsString, ValidateNested } from 'class-validator';
+import { IsBoolean, IsObject, IsOptional, IsString, ValidateNested } from 'class-validator';
 import { ProblemField } from '../../common/problem';
 import { TextField } from '../../common/text-field';
 import { SURVEY_MAX_ROWS } from '../survey/survey-file';
@@ -16,6 +16,7 @@ export class PreviewPopulationDto {
 
   @ApiPropertyOptional({ type: MappingDto, description: 'the suggested one when absent' })
   @IsOptional()
+  @IsObject()
   @ValidateNested()
   @Type(() => MappingDto)
   mapping?: MappingDto;
@@ -35,7 +36,7 @@ export class CreatePopulationDto {
   csv: string;
 
   @ApiProperty({ type: MappingDto })
-  @IsDefined()
+  @IsObject()
   @ValidateNested()
   @Type(() => MappingDto)
   mapping: MappingDto;

@@ -26,7 +26,7 @@ export function mappingFaults(file: SurveyFile, mapping: SuggestedMapping): Prob
   if (both !== undefined) {
     fault('sex', 'word-twice', `"${shortened(both)}" stands for women and for men; accepted: one of the two`);
   }
-  if (mapping.age !== undefined) found('age', mapping.age);
+  if (typeof mapping.age === 'string') found('age', mapping.age);
   mapping.measures.forEach(({ key, column, unit }, at) => {
     found(`measures.${at}.column`, column);
     const units = Object.keys(SURVEY_UNITS[MEASURE_INFO[key].unit]);

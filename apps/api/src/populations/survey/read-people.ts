@@ -66,7 +66,7 @@ export function summaryOf({ people }: CheckedSurvey, source: string): WholeSumma
 
 /** The columns that are used, as they stand in the file; nothing else of it. */
 export function keptRows(file: SurveyFile, { sex, age, measures }: Mapping): string {
-  const columns = [sex.column, ...(age === undefined ? [] : [age]), ...measures.map(({ column }) => column)];
+  const columns = [sex.column, ...(age ? [age] : []), ...measures.map(({ column }) => column)];
   const values = columns.map((column) => columnOf(file, column) ?? []);
   return csvText([columns, ...file.rows.map((_, row) => values.map((column) => column[row] ?? ''))]);
 }
@@ -79,7 +79,7 @@ function tableOf(file: SurveyFile, { sex, age, measures, decimalComma }: Mapping
       ...(sex.women?.length ? { women: sex.women } : {}),
       ...(sex.men?.length ? { men: sex.men } : {}),
     },
-    ...(age === undefined ? {} : { age: column(age) }),
+    ...(age ? { age: column(age) } : {}),
     measures: Object.fromEntries(
       measures.map(({ key, column: name, unit }) => [key, { ...column(name), unit }]),
     ),
