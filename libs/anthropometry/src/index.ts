@@ -25,6 +25,7 @@ export { completeSummary, type WholeSummary } from './populations/complete-summa
 export { fillGaps, type Filled } from './populations/fill-gaps.ts';
 export { isLogged, momentsOf, workedOf, type Moments, type Worked } from './populations/worked.ts';
 export {
+  isUncertainCell,
   nextMeasures,
   type NextMeasure,
   type NextMeasures,

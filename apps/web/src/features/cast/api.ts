@@ -5,6 +5,7 @@ import type {
   CastMember,
   ImportPreview,
   ImportResult,
+  MeasureNext,
   NamedPlaces,
   Page,
   TapeReading,
@@ -63,6 +64,14 @@ export const useSaveCastMember = (place: CastPlace) =>
 export const useErase = (place: CastPlace) =>
   useChange(place, (id: string) => api.delete(`${path(place)}/${id}`));
 
+/** Which measures of whom settle most; slow for a large cast, so nothing waits for it. */
+export const useMeasureNext = (place: CastPlace, enabled: boolean) =>
+  useQuery({
+    queryKey: [...castKey(place), 'measure-next'],
+    queryFn: ({ signal }) => api.get<MeasureNext>(`${path(place)}/measure-next`, { signal }),
+    enabled,
+  });
+
 /** Where the person's name was typed; looked up anew each time somebody is about to be erased. */
 export const useNamedPlaces = (place: CastPlace, id: string | undefined) =>
   useQuery({
@@ -84,3 +93,5 @@ export const useImport = (place: CastPlace) =>
 export const exportPath = (place: CastPlace, id: string) => `${path(place)}/${id}/export`;
 export const csvPath = ({ workshopId, productionId }: CastPlace) =>
   `${productionPath(workshopId, productionId)}/cast.csv`;
+
+export const measuringSheetPath = (place: CastPlace) => `${path(place)}/measuring-sheet.pdf`;

@@ -1,10 +1,4 @@
-import {
-  MEASURE_INFO,
-  type FitCell,
-  type Outcome,
-  type RuleBook,
-  type RuleUnit,
-} from '@settlewright/anthropometry';
+import { type FitCell, type Outcome, type RuleBook, type RuleUnit } from '@settlewright/anthropometry';
 import { spokenLength, type LengthStyle } from '@settlewright/geometry';
 import { verdictWord } from '@/components/verdict.tsx';
 import { amountText, knownMargin, REMOVED, type WithMargin } from '@/lib/margins.ts';
@@ -45,12 +39,6 @@ export function outcomeWords(outcome: Outcome, unit: RuleUnit, style: LengthStyl
     default:
       return outcome.reason;
   }
-}
-
-/** Measures as a person with a tape would name them: "elbow rest height and thigh clearance". */
-export function measureWords(keys: readonly (keyof typeof MEASURE_INFO)[]): string {
-  const names = keys.map((key) => MEASURE_INFO[key].name.toLowerCase());
-  return new Intl.ListFormat('en', { type: 'conjunction' }).format(names);
 }
 
 /** First name for lines where room is short; a mannequin keeps "Woman, 5th". */

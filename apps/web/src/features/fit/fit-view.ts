@@ -1,6 +1,26 @@
-import type { FitCell, FitSheet, RuleBook } from '@settlewright/anthropometry';
+import type {
+  BodyModel,
+  CheckSettings,
+  FitCell,
+  FitSheet,
+  KnownPerson,
+  NextMeasureKey,
+  RuleBook,
+  SetSituation,
+  Sitter,
+} from '@settlewright/anthropometry';
 import type { Fix, LengthStyle, SetDocument } from '@settlewright/geometry';
 import { createContext, useContext } from 'react';
+
+/** What the rows of the sheet are made from, for readers who may see measures. */
+export interface FitBasis {
+  situation: SetSituation;
+  sitters: readonly Sitter[];
+  /** Everybody of the cast, seated or not. */
+  people: readonly { id: string; name: string; person: KnownPerson }[];
+  model: BodyModel;
+  settings: CheckSettings;
+}
 
 /** What every part of the fit sheet reads; the page that shows the sheet provides it. */
 export interface FitView {
@@ -21,6 +41,10 @@ export interface FitView {
   /** Absent when the document cannot be changed here. */
   fixesFor?: (cell: FitCell) => Fix[];
   take?: (fix: Fix) => void;
+  /** Absent for readers who may not see measures. */
+  basis?: FitBasis;
+  /** Where a measure of somebody of the cast is entered; absent where nothing can be. */
+  personTo?: (castId: string, key: NextMeasureKey) => string;
   /** The set itself, for its plan. */
   document?: SetDocument;
   /** What the set says about itself; absent where it is not told. */

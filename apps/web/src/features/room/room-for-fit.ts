@@ -1,4 +1,13 @@
-import type { FitCell, FitSheet, RuleBook } from '@settlewright/anthropometry';
+import type {
+  BodyModel,
+  CheckSettings,
+  FitCell,
+  FitSheet,
+  KnownPerson,
+  RuleBook,
+  SetSituation,
+  Sitter,
+} from '@settlewright/anthropometry';
 import {
   suggestFixes,
   formatLength,
@@ -10,7 +19,7 @@ import { useMemo } from 'react';
 import { useRoomAddress } from './hooks/use-address.ts';
 import { usePieceActions } from './hooks/use-piece-actions.ts';
 import { usePicture, useSurroundings } from './room-context.tsx';
-import { sitterColour } from './sitters.ts';
+import { personOf, sitterColour, sittersOf } from './sitters.ts';
 import { useRoom, useRoomStore } from './store.ts';
 
 /** What the fit sheet needs of the room; the route hands it on, as features do not know each other. */
@@ -30,6 +39,15 @@ export interface RoomForFit {
   open: (cellId: string | null) => void;
   fixesFor?: (cell: FitCell) => Fix[];
   take?: (fix: Fix) => void;
+  /** What the rows are made from, for readers who may see measures. */
+  basis?: {
+    situation: SetSituation;
+    sitters: readonly Sitter[];
+    people: readonly { id: string; name: string; person: KnownPerson }[];
+    model: BodyModel;
+    settings: CheckSettings;
+  };
+  personTo?: (castId: string, key: string) => string;
   asked: SetDocument['asked'];
   ask?: (asked: SetDocument['asked'], doing?: string) => void;
   clientView: boolean;
@@ -38,7 +56,7 @@ export interface RoomForFit {
 }
 
 export function useRoomForFit(): RoomForFit {
-  const { engine, style, detail, canEdit, cast, maker, confidenceSetAt } = useSurroundings();
+  const { engine, style, detail, canEdit, cast, maker, confidenceSetAt, path } = useSurroundings();
   const picture = usePicture();
   const store = useRoomStore();
   const litCellId = useRoom((state) => state.litCellId);
@@ -72,8 +90,22 @@ export function useRoomForFit(): RoomForFit {
       light: (cellId) => store.getState().light(cellId),
       openCellId,
       open: (cellId) => store.getState().openCell(cellId),
+      ...(detail === 'full' && {
+        basis: {
+          situation: picture.situation,
+          sitters: sittersOf(picture.document, cast, engine.model),
+          people: cast.flatMap((member) => {
+            const person = member.removed ? undefined : personOf(member);
+            return person ? [{ id: member.id, name: member.name, person }] : [];
+          }),
+          model: engine.model,
+          settings: { ...picture.document.asked, confidence: picture.sheet.confidence },
+        },
+      }),
       asked: picture.document.asked,
       ...(canEdit && {
+        personTo: (castId: string, key: string) =>
+          `/w/${path.workshopId}/p/${path.productionId}/people?${new URLSearchParams({ edit: castId, field: key })}`,
         ask: (asked: SetDocument['asked'], doing = 'What this set asks') =>
           actions.replace({ ...picture.document, asked }, doing),
         fixesFor: (cell: FitCell) => suggestFixes({ document: picture.document, cell, check: maker.check }),
@@ -102,6 +134,7 @@ export function useRoomForFit(): RoomForFit {
     canEdit,
     maker,
     confidenceSetAt,
+    path,
     actions,
     clientView,
     fitOpen,

@@ -24,6 +24,18 @@ const HETTY = {
   removed: false,
 };
 
+const NEXT = [
+  {
+    castId: HETTY.id,
+    sets: ['Dining car'],
+    uncertain: 4,
+    order: [
+      { key: 'elbow_rest_height', settles: 2.1, ruleIds: ['SILL-01'] },
+      { key: 'weight_kg', settles: 0.8, ruleIds: [] },
+    ],
+  },
+];
+
 const castPath = '*/api/workshops/:workshopId/productions/:productionId/cast';
 const page = (items: unknown[]) => ({ items, total: items.length, page: 1, pageSize: 200 });
 const show = () =>
@@ -34,6 +46,7 @@ const show = () =>
 
 describe('PeoplePage', () => {
   beforeEach(() => {
+    server.use(http.get(`${castPath}/measure-next`, () => HttpResponse.json({ items: NEXT })));
     useUnitChoice.setState({ production: { system: 'feet-inches', roundTo: 8 }, personal: null });
   });
 
@@ -45,6 +58,17 @@ describe('PeoplePage', () => {
     expect(within(row).getByText('2 measures')).toBeVisible();
     expect(within(row).getByText(/115/)).toBeVisible();
     expect(within(row).getByText('four feet eleven and one half inches')).toBeInTheDocument();
+  });
+
+  it('names the measures that settle most and opens the dialog at one of them', async () => {
+    signInAs('designer');
+    server.use(http.get(castPath, () => HttpResponse.json(page([HETTY]))));
+    show();
+    expect(await screen.findByText(/settles about 3 of 4 checks in doubt, Dining car/)).toBeVisible();
+    await userEvent.click(screen.getByRole('link', { name: /^elbow rest/ }));
+    const dialog = await screen.findByRole('dialog');
+    await waitFor(() => expect(within(dialog).getByLabelText('Elbow rest')).toHaveFocus());
+    expect(within(dialog).getByRole('button', { name: 'Measuring sheet (PDF)' })).toBeVisible();
   });
 
   it('shows a carpenter names and parts, and no way to a number', async () => {

@@ -17,16 +17,17 @@ import { usePageTitle } from '@/lib/page-title.ts';
 import { sayProblem } from '@/lib/problem.ts';
 import { useProduction } from '@/lib/production.ts';
 import { useWorkshop } from '@/lib/workshop.ts';
-import { type CastPlace, csvPath, exportPath, useCast } from '../api.ts';
+import { type CastPlace, csvPath, exportPath, measuringSheetPath, useCast, useMeasureNext } from '../api.ts';
 import { knownBy } from '../known-by.ts';
 import { EraseDialog } from './erase-dialog.tsx';
 import { ImportDialog } from './import-dialog.tsx';
+import { nextColumn } from './next-column.tsx';
 import { MannequinNote } from './mannequin-note.tsx';
 import { PersonDialog } from './person-dialog.tsx';
 import { PersonName } from './person-name.tsx';
 
-const fetchFile = (path: string) => {
-  download(path).catch((error: unknown) => toast(sayProblem(error)));
+const fetchFile = (path: string, query?: Record<string, string>) => {
+  download(path, query).catch((error: unknown) => toast(sayProblem(error)));
 };
 
 const nameColumn: DataColumn<CastMember> = {
@@ -103,6 +104,11 @@ function RowMenu({ place, person, onEdit, onErase }: RowMenuProps) {
         side="end"
         entries={[
           {
+            id: 'sheet',
+            words: 'Measuring sheet (PDF)',
+            onPress: () => fetchFile(measuringSheetPath(place), { person: person.id }),
+          },
+          {
             id: 'export',
             words: 'Export what is held',
             onPress: () => fetchFile(exportPath(place, person.id)),
@@ -130,6 +136,10 @@ export function PeoplePage() {
   const [erased, setErased] = useState<CastMember | null>(null);
   const [importing, setImporting] = useState(false);
   const people = cast.data?.items ?? [];
+  const next = useMeasureNext(place, workshop.canEdit).data?.items;
+  const toEdit = search.get('edit');
+  const field = search.get('field');
+  const shown = edited ?? people.find(({ id, removed }) => id === toEdit && !removed) ?? null;
   const add = () => setSearch({ add: '1' });
 
   const columns = useMemo<DataColumn<CastMember>[]>(() => {
@@ -146,6 +156,7 @@ export function PeoplePage() {
     return [
       nameColumn,
       ...measureColumns(format),
+      nextColumn(next),
       {
         id: 'actions',
         header: '',
@@ -162,7 +173,7 @@ export function PeoplePage() {
         ),
       },
     ];
-  }, [workshop.canEdit, format, place]);
+  }, [workshop.canEdit, format, place, next]);
 
   return (
     <div className="page">
@@ -212,9 +223,14 @@ export function PeoplePage() {
             nothingFound="Nobody goes by that name."
             tools={
               workshop.canEdit && (
-                <Button look="word" onClick={() => fetchFile(csvPath(place))}>
-                  All as a table (CSV)
-                </Button>
+                <span className="flex flex-wrap gap-x-5 gap-y-2">
+                  <Button look="word" onClick={() => fetchFile(measuringSheetPath(place))}>
+                    Measuring sheets (PDF)
+                  </Button>
+                  <Button look="word" onClick={() => fetchFile(csvPath(place))}>
+                    All as a table (CSV)
+                  </Button>
+                </span>
               )
             }
           />
@@ -236,13 +252,15 @@ export function PeoplePage() {
       {workshop.canEdit && (
         <>
           <PersonDialog
-            key={edited?.id ?? 'new'}
+            key={`${shown?.id ?? 'new'}|${field ?? ''}`}
             place={place}
-            person={edited}
-            open={adding || edited !== null}
+            person={shown}
+            field={field ?? undefined}
+            onPrint={(id) => fetchFile(measuringSheetPath(place), { person: id })}
+            open={adding || shown !== null}
             onClose={() => {
               setEdited(null);
-              if (adding) setSearch({}, { replace: true });
+              if (adding || toEdit !== null) setSearch({}, { replace: true });
             }}
           />
           <ImportDialog place={place} open={importing} onClose={() => setImporting(false)} />

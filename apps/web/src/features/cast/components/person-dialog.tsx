@@ -1,8 +1,9 @@
 import { zodResolver } from '@hookform/resolvers/zod';
-import { MEASURE_INFO, TAPE_MEASURE_KEYS } from '@settlewright/anthropometry';
-import { useState } from 'react';
+import { MEASURE_INFO, TAPE_MEASURE_KEYS, type TapeMeasureKey } from '@settlewright/anthropometry';
+import { useEffect, useState } from 'react';
 import { Controller, useForm } from 'react-hook-form';
 import { toast } from 'sonner';
+import { Button } from '@/components/button.tsx';
 import { ChoiceGroup } from '@/components/choice-group.tsx';
 import { FormDialog } from '@/components/dialog.tsx';
 import { Disclosure } from '@/components/disclosure.tsx';
@@ -15,7 +16,7 @@ import type { CastMember } from '@/lib/contract.ts';
 import { dayWords } from '@/lib/dates.ts';
 import { applyProblem } from '@/lib/form-problem.ts';
 import { type CastPlace, useSaveCastMember } from '../api.ts';
-import { SHOE_MM, STATURE_MM, TAPE_MM, WEIGHT_KG } from '../limits.ts';
+import { SHOE_MM, STATURE_MM, TAPE_MM, WEIGHT_KG } from '@/lib/body-limits.ts';
 import { formOf, formPath, inputOf, type PersonForm, personFormSchema } from '../person-form.ts';
 
 const BODY_DATA = [
@@ -35,20 +36,42 @@ const SOURCES = [
   { value: 'measured', words: 'Measured', describe: 'against a wall, without shoes' },
 ] as const;
 
+const FOCUS_MS = 60;
+
 interface PersonDialogProps {
   place: CastPlace;
   /** The person to change, null to add one. */
   person: CastMember | null;
+  /** Measure whose field has the focus at once. */
+  field?: string | undefined;
+  onPrint: (castId: string) => void;
   open: boolean;
   onClose: () => void;
 }
 
+type FieldPath = 'stature' | 'weight' | `measured.${TapeMeasureKey}`;
+
+/** Where the form holds a measure. */
+function pathOf(measure: string | undefined): FieldPath | undefined {
+  if (measure === 'stature') return 'stature';
+  if (measure === 'weight_kg') return 'weight';
+  const key = TAPE_MEASURE_KEYS.find((one) => one === measure);
+  return key && `measured.${key}`;
+}
+
 /** Takes whatever is known of a person; a name alone is enough. */
-export function PersonDialog({ place, person, open, onClose }: PersonDialogProps) {
+export function PersonDialog({ place, person, field: measure, onPrint, open, onClose }: PersonDialogProps) {
   const save = useSaveCastMember(place);
   const [problem, setProblem] = useState<string | null>(null);
   const form = useForm<PersonForm>({ resolver: zodResolver(personFormSchema), values: formOf(person) });
-  const { control, register } = form;
+  const { control, register, setFocus } = form;
+  const first = pathOf(measure);
+  useEffect(() => {
+    if (!open || first === undefined) return undefined;
+    // The dialog takes the focus first, as it opens.
+    const timer = setTimeout(() => setFocus(first), FOCUS_MS);
+    return () => clearTimeout(timer);
+  }, [open, first, setFocus]);
   const { errors } = form.formState;
   const close = () => {
     setProblem(null);
@@ -185,9 +208,20 @@ export function PersonDialog({ place, person, open, onClose }: PersonDialogProps
         />
       </div>
       <div className="mt-7">
-        <RuleHeading level={3}>Taken with a tape, seated</RuleHeading>
+        <RuleHeading
+          level={3}
+          aside={
+            person && (
+              <Button look="word" onClick={() => onPrint(person.id)}>
+                Measuring sheet (PDF)
+              </Button>
+            )
+          }
+        >
+          Taken with a tape, seated
+        </RuleHeading>
         <Disclosure
-          open={taken > 0}
+          open={taken > 0 || (first?.startsWith('measured') ?? false)}
           words={
             taken > 0 ? `${taken} taken; see all ${TAPE_MEASURE_KEYS.length}` : `Enter what was measured`
           }

@@ -61,7 +61,7 @@ export function CellSlip({ cell, sitterName }: { cell: FitCell; sitterName: stri
           <p className="max-w-text">
             <strong className="font-semibold">Why.</strong> {whyFor(ruleBook.rule(cell.ruleId), sitterName)}
           </p>
-          {verdict && sums && <Doubt outcome={verdict} />}
+          {verdict && sums && <Doubt outcome={verdict} cell={cell} of={sitterName} />}
           {cell.side !== undefined && <p className="mt-2 text-sm text-ink-2">At the sitter’s {cell.side}.</p>}
           <SourceLine ruleId={cell.ruleId} />
         </div>

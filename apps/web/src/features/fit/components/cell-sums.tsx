@@ -1,11 +1,13 @@
-import type { VerdictOutcome } from '@settlewright/anthropometry';
+import type { FitCell, VerdictOutcome } from '@settlewright/anthropometry';
+import { Fragment } from 'react';
 import { Measure } from '@/components/measure.tsx';
 import { Verdict, verdictTone } from '@/components/verdict.tsx';
-import { amountText, measureWords, REMOVED } from '../amounts.ts';
+import { amountText, REMOVED } from '../amounts.ts';
 import { useFitView } from '../fit-view.ts';
 import { marginSum, type MarginSum } from '../sums.ts';
 import { Margin } from './fit-cell.tsx';
 import { Ledger } from './ledger.tsx';
+import { MeasureLink } from './measure-link.tsx';
 
 interface Props {
   outcome: VerdictOutcome;
@@ -88,18 +90,28 @@ export function Sums({ outcome, ruleId }: Props) {
   );
 }
 
-/** How sure a predicted verdict is, and which measure would settle it. */
-export function Doubt({ outcome }: { outcome: VerdictOutcome }) {
+/** How sure a predicted verdict is, how sure it has to be, and which measure would settle it. */
+export function Doubt({ outcome, cell, of }: { outcome: VerdictOutcome; cell: FitCell; of: string }) {
+  const { sheet } = useFitView();
   if (!outcome.estimated || typeof outcome.margin !== 'number') return null;
   const inHundred = (probability: number) => Math.round(probability * 100);
+  const settling = outcome.settleWith.slice(0, 2);
   return (
     <p className="mt-2 text-sm text-ink-2">
       Predicted, not measured: {inHundred(outcome.probability.pass)} in 100 such people fit,{' '}
-      {inHundred(outcome.probability.insideFail)} in 100 are at least tight.
-      {outcome.settleWith.length > 0 && (
+      {inHundred(outcome.probability.insideFail)} in 100 are at least tight; a verdict asks for{' '}
+      {inHundred(sheet.confidence)}.
+      {settling.length > 0 && (
         <strong className="font-semibold text-ink">
           {' '}
-          To settle it, measure {measureWords(outcome.settleWith.slice(0, 2))}.
+          To settle it, measure{' '}
+          {settling.map((key, index) => (
+            <Fragment key={key}>
+              {index > 0 && ' and '}
+              <MeasureLink castId={cell.sitterId} of={of} measure={key} />
+            </Fragment>
+          ))}
+          .
         </strong>
       )}
     </p>

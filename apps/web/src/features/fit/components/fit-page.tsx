@@ -10,12 +10,14 @@ import { download } from '@/lib/download.ts';
 import { sayProblem } from '@/lib/problem.ts';
 import type { RowOrder } from '../columns.ts';
 import { useFitView } from '../fit-view.ts';
+import { StandInDialog } from '../stand-in/stand-in-dialog.tsx';
 import { AskedForm } from './asked-form.tsx';
 import { AtOdds } from './at-odds.tsx';
 import { CountedApart } from './counted-apart.tsx';
 import { FitGrid } from './fit-grid.tsx';
 import { FitCaution, FitConfidence, FitKey } from './fit-key.tsx';
 import { FitPeople } from './fit-people.tsx';
+import { MeasureNext } from './measure-next.tsx';
 import { PiecesAndWays } from './pieces-and-ways.tsx';
 
 const ORDERS: readonly { value: RowOrder; words: string }[] = [
@@ -32,7 +34,8 @@ interface FitPageProps {
 
 /** The whole sheet on a page of its own: sitters, the public, pieces and ways. */
 export function FitPage({ roomTo, papersAt }: FitPageProps) {
-  const { sheet } = useFitView();
+  const { sheet, basis } = useFitView();
+  const [trying, setTrying] = useState(false);
   const [order, setOrder] = useState<RowOrder>('place');
   const [problem, setProblem] = useState<string | null>(null);
   const fetchPaper = (ending: 'pdf' | 'csv') => {
@@ -52,8 +55,14 @@ export function FitPage({ roomTo, papersAt }: FitPageProps) {
         }
         actions={
           <>
+            {basis?.sitters.some(({ kind }) => kind === 'cast') && (
+              <Button onClick={() => setTrying(true)}>Try with a stand-in</Button>
+            )}
             <Button onClick={() => fetchPaper('pdf')}>Print, PDF</Button>
             <Button onClick={() => fetchPaper('csv')}>Table, CSV</Button>
+            <Link className="link self-center" to={`${roomTo}/stick`}>
+              Story stick
+            </Link>
             <Link className="link self-center" to={`${roomTo}/crowd`}>
               Who fits
             </Link>
@@ -108,8 +117,10 @@ export function FitPage({ roomTo, papersAt }: FitPageProps) {
       <div className="mt-10">
         <PiecesAndWays />
       </div>
+      <MeasureNext />
       <AtOdds />
       <AskedForm />
+      <StandInDialog open={trying} onClose={() => setTrying(false)} />
       <div className="mt-6 flex flex-wrap justify-between gap-x-8 gap-y-2">
         <p className="text-sm text-ink-2 max-tablet:hidden">
           Arrow keys move between cells, Enter opens one, Escape closes it.

@@ -67,6 +67,15 @@ export const check = (document: SetDocument): FitSheet =>
 
 export const sheet = check(facingBenches);
 
+/** What the rows are made from, as the room hands it on. */
+export const basis: NonNullable<FitView['basis']> = {
+  situation: measureSet(facingBenches),
+  sitters: sittersAt(facingBenches),
+  people: sittersAt(facingBenches).map(({ id, name, person }) => ({ id, name, person })),
+  model,
+  settings: facingBenches.asked,
+};
+
 interface Options extends Partial<FitView> {
   /** Makes what would change a cell by the real check. */
   fixes?: boolean;

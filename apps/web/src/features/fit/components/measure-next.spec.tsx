@@ -1,0 +1,39 @@
+import { createBodyModel } from '@settlewright/anthropometry';
+import summary from '@settlewright/seed-data/populations/ansur2.json';
+import { screen, within } from '@testing-library/react';
+import { MemoryRouter } from 'react-router-dom';
+import { describe, expect, it, vi } from 'vitest';
+import { answerNext, type NextQuestion } from '../next/next-question.ts';
+import { basis, showSheet } from '../test/show-sheet.tsx';
+import { MeasureNext } from './measure-next.tsx';
+
+// There is no worker here; the same question is answered on the spot.
+vi.mock('../next/ask-next.ts', () => {
+  const model = createBodyModel(summary);
+  return {
+    askNext: (question: NextQuestion) => Promise.resolve(answerNext(structuredClone(question), model)),
+  };
+});
+
+const personTo = (castId: string, key: string) => `/people?edit=${castId}&field=${key}`;
+const list = (
+  <MemoryRouter>
+    <MeasureNext />
+  </MemoryRouter>
+);
+
+describe('MeasureNext', () => {
+  it('names the measures of each person in doubt and leads to their fields', async () => {
+    showSheet(list, { basis, personTo });
+    const region = await screen.findByText('Marcus Adeyemi-Rowe', {}, { timeout: 8000 });
+    const line = within(region.closest('li') as HTMLElement);
+    const [first] = line.getAllByRole('link');
+    expect(first).toHaveAttribute('href', expect.stringMatching(/^\/people\?edit=marcus&field=[a-z_]+$/));
+    expect(line.getByText(/(settles about|may settle) .* in doubt/)).toBeVisible();
+  });
+
+  it('says nothing to readers who may not see measures', () => {
+    showSheet(list);
+    expect(screen.queryByText('Measure next')).toBeNull();
+  });
+});
