@@ -59,7 +59,7 @@ export type { TapeLine } from './tapes/tape-line.ts';
 export { tapeLines, type TapeBody } from './tapes/tape-lines.ts';
 export * from './situation/seat-height-bands.ts';
 export type { Dimension } from './choices/dimension.ts';
-export { dimensionOf, dimensionsOf } from './choices/dimensions.ts';
+export { dimensionIdOf, dimensionOf, dimensionsOf } from './choices/dimensions.ts';
 export { isGain, isLoss, sheetChanges, type CellChange, type CellState } from './choices/sheet-changes.ts';
 export { stickValues, storyStick } from './choices/story-stick.ts';
 export type { StickClause, StickRow, StoryStick } from './choices/story-stick.ts';

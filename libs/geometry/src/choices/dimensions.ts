@@ -36,6 +36,22 @@ export function dimensionsOf(document: SetDocument): Dimension[] {
 export const dimensionOf = (document: SetDocument, id: string): Dimension | undefined =>
   dimensionsOf(document).find((one) => one.id === id);
 
+/**
+ * The dimension that one number of a piece is.
+ *
+ * @param document - the set
+ * @param pieceId - the piece
+ * @param key - key of the number, as `parametersOf` names it
+ * @returns the id of the piece's own dimension; `undefined` when the number is none
+ */
+export function dimensionIdOf(document: SetDocument, pieceId: string, key: string): string | undefined {
+  const piece = document.pieces.find(({ id }) => id === pieceId);
+  const kind = piece && DIMENSION_KINDS.find((one) => keyOf(piece, one) === key);
+  if (!piece || !kind || valueOf(piece, kind) === undefined) return undefined;
+  const having = document.pieces.filter((one) => valueOf(one, kind) !== undefined);
+  return having.length > 1 ? `${kind.id}|${pieceId}` : kind.id;
+}
+
 function withTables(document: SetDocument, kind: DimensionKind, seats: readonly Piece[]): Dimension[] {
   const tables = document.pieces.filter((piece) => piece.kind === 'table');
   if (tables.length === 0) return [];

@@ -16,7 +16,7 @@ import { emptySetDocument } from '../room/read-document.ts';
 import { measureSet } from '../situation/measure-set.ts';
 import { seatHeightNeeds } from '../situation/seat-height-bands.ts';
 import type { Dimension } from './dimension.ts';
-import { dimensionOf, dimensionsOf } from './dimensions.ts';
+import { dimensionIdOf, dimensionOf, dimensionsOf } from './dimensions.ts';
 import { stickValues, storyStick, type StoryStick } from './story-stick.ts';
 
 const ruleBook = loadRuleBook(rules);
@@ -130,6 +130,18 @@ describe('dimensions of a set', () => {
     expect(after && overlapOf(after).map((mm, i) => mm - (overlapOf(document)[i] as number))).toEqual(
       overlapOf(document).map(() => expect.closeTo(20, 6)),
     );
+  });
+
+  it('finds the dimension that a number of a piece is', () => {
+    const document = bay();
+    const [bench, table] = ['B1', 'T1'].map(
+      (mark) => document.pieces.find((piece) => piece.mark === mark)?.id ?? '',
+    );
+    const own = dimensionIdOf(document, bench ?? '', 'pressedSeatHeight');
+    expect(named(document, own ?? '').marks).toEqual(['B1']);
+    expect(named(document, dimensionIdOf(document, table ?? '', 'heightMm') ?? '').marks).toEqual(['T1']);
+    expect(dimensionIdOf(document, bench ?? '', 'places.count')).toBeUndefined();
+    expect(dimensionIdOf(document, 'gone', 'heightMm')).toBeUndefined();
   });
 
   it('says nothing of an empty set and keeps inside every limit', () => {
