@@ -1,5 +1,6 @@
+import { dimensionIdOf } from '@settlewright/geometry';
 import { useMemo } from 'react';
-import { useParams } from 'react-router-dom';
+import { Link, useParams } from 'react-router-dom';
 import { FitFoot, FitViewContext, SeatHeightBand } from '@/features/fit/index.ts';
 import { RoomPage, SpecLine, useRoomForFit } from '@/features/room/index.ts';
 
@@ -29,8 +30,27 @@ function SeatBand({ pieceId }: { pieceId: string }) {
   );
 }
 
-const bandLink = (pieceId: string, parameterKey: string) =>
-  parameterKey === 'pressedSeatHeight' ? <SeatBand pieceId={pieceId} /> : null;
+/** The way to the bands of everybody along this number. */
+function WayToStick({ pieceId, parameterKey }: { pieceId: string; parameterKey: string }) {
+  const { workshopId, productionId, setId } = useParams();
+  const { document } = useRoomForFit();
+  const dimension = dimensionIdOf(document, pieceId, parameterKey);
+  if (dimension === undefined) return null;
+  const to = `/w/${workshopId}/p/${productionId}/sets/${setId}/stick?d=${encodeURIComponent(dimension)}`;
+  return (
+    // A press must not end the edit before the page turns.
+    <Link className="link whitespace-nowrap" to={to} onMouseDown={(event) => event.preventDefault()}>
+      See the band
+    </Link>
+  );
+}
+
+const bandLink = (pieceId: string, parameterKey: string) => (
+  <>
+    <WayToStick pieceId={pieceId} parameterKey={parameterKey} />
+    {parameterKey === 'pressedSeatHeight' && <SeatBand pieceId={pieceId} />}
+  </>
+);
 
 /** The room of a set, with its fit sheet at the foot. */
 export function Component() {

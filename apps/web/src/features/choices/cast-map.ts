@@ -1,6 +1,9 @@
 import type { FitSheet, PlaceSituation, Verdict } from '@settlewright/anthropometry';
 import { measureSet, type Dimension, type SetDocument } from '@settlewright/geometry';
 
+/** What a sitter's worst verdict comes to; what is not known is not served. */
+type Served = 'served' | 'notKnown' | 'lost';
+
 /** Where one sitter is at least tight, over two dimensions. */
 export interface Region {
   sitterId: string;
@@ -8,15 +11,18 @@ export interface Region {
   name: string;
   /** Room to the nearest fail line at each point, rows of `up`; negative when missing. */
   rooms: number[][];
+  states: Served[][];
+  /** The check that keeps the sitter from fitting anywhere on the map, where one does. */
+  blockedBy?: string;
 }
 
 /** Two dimensions tried against each other. */
 export interface CastMap {
   across: number[];
   up: number[];
+  /** Rules of a person that either number moves. */
+  ruleIds: string[];
   regions: Region[];
-  /** Sitters that are at least tight at each point; what is not known is not served. */
-  served: number[][];
   placesAt: PlaceSituation[][][];
 }
 
@@ -67,16 +73,14 @@ export function* castMap({ across, up, documentAt, check }: MapInput): Generator
     sheets.map((row) => row.map((sheet) => saidAt(sheet, placeId))),
   );
   const moving = movingRules(answers.map((grid) => grid.flat()));
-  const regions = people.map(({ sitterId, placeId, name }, n) => ({
-    sitterId,
-    placeId,
-    name,
-    rooms: (answers[n] ?? []).map((row) => row.map((said) => roomOf(said, moving))),
-  }));
-  const served = sheets.map((row, i) =>
-    row.map((_, j) => answers.filter((grid) => isServed(grid[i]?.[j], moving)).length),
-  );
-  return { across: [...across], up: [...up], regions, served, placesAt };
+  const regions = people.map(({ sitterId, placeId, name }, n): Region => {
+    const grid = answers[n] ?? [];
+    const rooms = grid.map((row) => row.map((said) => roomOf(said, moving)));
+    const states = grid.map((row) => row.map((said) => stateOf(said, moving)));
+    const blockedBy = rooms.flat().every((room) => room < 0) ? blockOf(grid.flat(), moving) : undefined;
+    return { sitterId, placeId, name, rooms, states, ...(blockedBy ? { blockedBy } : {}) };
+  });
+  return { across: [...across], up: [...up], ruleIds: [...moving], regions, placesAt };
 }
 
 function saidAt(sheet: FitSheet | undefined, placeId: string): Said | undefined {
@@ -109,11 +113,26 @@ function roomOf(said: Said | undefined, moving: ReadonlySet<string>): number {
   return Math.min(FAR, Math.max(-FAR, Math.min(FAR, ...rooms)));
 }
 
-function isServed(said: Said | undefined, moving: ReadonlySet<string>): boolean {
-  if (!said) return false;
-  return [...said].every(
-    ([ruleId, { verdict }]) => !moving.has(ruleId) || verdict === 'fits' || verdict === 'tight',
-  );
+function stateOf(said: Said | undefined, moving: ReadonlySet<string>): Served {
+  const verdicts = [...(said ?? [])]
+    .filter(([ruleId]) => moving.has(ruleId))
+    .map(([, { verdict }]) => verdict);
+  if (!said || verdicts.includes('wontFit')) return 'lost';
+  return verdicts.includes('notKnown') ? 'notKnown' : 'served';
+}
+
+/** The rule with the least room where a sitter has most of it. */
+function blockOf(along: readonly (Said | undefined)[], moving: ReadonlySet<string>): string | undefined {
+  let best: { room: number; ruleId: string | undefined } = { room: -Infinity, ruleId: undefined };
+  for (const said of along) {
+    const room = roomOf(said, moving);
+    if (room <= best.room) continue;
+    const [worst] = [...(said ?? [])]
+      .filter(([ruleId]) => moving.has(ruleId))
+      .sort(([, a], [, b]) => a.margin - b.margin);
+    best = { room, ruleId: worst?.[0] };
+  }
+  return best.ruleId;
 }
 
 /** A pair of values that is worth a look. */
@@ -126,7 +145,7 @@ export interface BestPair {
 
 /** Pairs that serve most sitters, then most of the public, then lie nearest to the present. */
 export function bestPairs(
-  { across, up, served }: Pick<CastMap, 'across' | 'up' | 'served'>,
+  { across, up, regions }: Pick<CastMap, 'across' | 'up' | 'regions'>,
   shares: readonly (readonly (number | null)[])[] | undefined,
   present: { across: number; up: number },
   most = 5,
@@ -138,7 +157,7 @@ export function bestPairs(
       across.map((first, j): BestPair => ({
         across: first,
         up: second,
-        served: served[i]?.[j] ?? 0,
+        served: regions.filter(({ states }) => states[i]?.[j] === 'served').length,
         share: shares?.[i]?.[j] ?? undefined,
       })),
     )

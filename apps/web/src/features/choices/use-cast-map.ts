@@ -1,14 +1,14 @@
 import { dimensionOf, lengthStep, type Dimension } from '@settlewright/geometry';
 import { useEffect, useMemo, useState } from 'react';
 import { askCrowd } from '@/lib/crowd/ask-crowd.ts';
-import type { CrowdChoice } from '@/lib/crowd/crowds.ts';
+import type { CrowdRequest } from '@/lib/crowd/crowd-people.ts';
 import { castMap, gridValues, type CastMap } from './cast-map.ts';
 import { useChoices } from './choices-view.ts';
 import { inSlices } from './in-slices.ts';
 import { changingPlaces } from './places-along.ts';
 import { stepFor, type TriedValues } from './tried-values.ts';
 
-/** A tenth of the people of the curve's points would show; the map is shaded in broad tones. */
+/** Fewer than for a curve: the map is shaded in broad tones. */
 const MAP_COUNT = 4000;
 
 export interface MapProgress {
@@ -25,11 +25,10 @@ export interface MapProgress {
 export function useCastMap(
   tried: TriedValues,
   secondId: string | undefined,
-  crowd: CrowdChoice,
+  crowd: CrowdRequest | undefined,
 ): MapProgress {
   const { document, check, style } = useChoices();
   const { dimension: first } = tried;
-  const { populationId, women } = crowd;
   const { lensHeightMm } = document.asked;
   // From the same set as the first dimension, so that a move along that one changes nothing here.
   const second = useMemo(() => {
@@ -64,17 +63,17 @@ export function useCastMap(
   }, [first, second, stepMm, check]);
 
   const map = second && found?.second === second ? found.map : undefined;
-  const key = `${populationId} ${women} ${lensHeightMm}`;
+  const key = `${crowd?.populationId} ${crowd?.women} ${lensHeightMm}`;
   useEffect(() => {
-    if (!map) return undefined;
+    if (!map || !crowd) return undefined;
     let current = true;
-    const { across, up, placesAt } = map;
+    const { across, up, placesAt, ruleIds } = map;
     const placeIds = changingPlaces(placesAt.flat());
     if (placeIds.length === 0) return undefined;
     askCrowd('map', {
-      crowd: { populationId, women },
+      crowd,
       count: MAP_COUNT,
-      ticked: { placeIds },
+      ticked: { placeIds, ruleIds },
       across,
       up,
       placesAt,
@@ -87,7 +86,7 @@ export function useCastMap(
     return () => {
       current = false;
     };
-  }, [map, key, populationId, women, lensHeightMm]);
+  }, [map, key, crowd, lensHeightMm]);
 
   const current = counted && counted.map === map && counted.key === key ? counted : undefined;
   return { second, map, shares: current?.shares, done, fault: current?.fault };

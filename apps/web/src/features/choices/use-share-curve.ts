@@ -1,7 +1,7 @@
 import { useEffect, useState } from 'react';
 import { askCrowd } from '@/lib/crowd/ask-crowd.ts';
 import type { CrowdTold, CurveShare } from '@/lib/crowd/crowd-tasks.ts';
-import type { CrowdChoice } from '@/lib/crowd/crowds.ts';
+import type { CrowdRequest } from '@/lib/crowd/crowd-people.ts';
 import { useChoices } from './choices-view.ts';
 import { inSlices } from './in-slices.ts';
 import { changingPlaces, measuredPlaces } from './places-along.ts';
@@ -18,6 +18,8 @@ export interface ShareCurves {
   /** Of every check of a person at once, everything else held. */
   joint: CurveShare[];
   told: CrowdTold;
+  /** Places that the dimension changes: a person counts who fits at all of them. */
+  placeIds: string[];
 }
 
 type Answer = { key: unknown; curves: ShareCurves } | { key: unknown; fault: string };
@@ -26,14 +28,14 @@ type Answer = { key: unknown; curves: ShareCurves } | { key: unknown; fault: str
 export function useShareCurves(
   tried: TriedValues | undefined,
   ruleIds: readonly string[] | undefined,
-  { populationId, women }: CrowdChoice,
+  crowd: CrowdRequest | undefined,
 ): { curves?: ShareCurves; fault?: string } {
   const { document } = useChoices();
   const { lensHeightMm } = document.asked;
   const [answer, setAnswer] = useState<Answer>();
-  const key = `${ruleIds?.join(' ')} ${populationId} ${women} ${lensHeightMm}`;
+  const key = `${ruleIds?.join(' ')} ${crowd?.populationId} ${crowd?.women} ${lensHeightMm}`;
   useEffect(() => {
-    if (!tried || !ruleIds) return undefined;
+    if (!tried || !ruleIds || !crowd) return undefined;
     const stop = new AbortController();
     const every = Math.ceil(tried.values.length / MOST_POINTS);
     const values = tried.values.filter((_, n) => n % every === 0 || n === tried.values.length - 1);
@@ -44,7 +46,7 @@ export function useShareCurves(
       );
       if (!along) return;
       const asked = {
-        crowd: { populationId, women },
+        crowd,
         count: CROWD_COUNT,
         values: values.filter((_, n) => (along[n] ?? []).length > 0),
         placesAt: along.filter((places) => places.length > 0),
@@ -54,7 +56,7 @@ export function useShareCurves(
       if (placeIds.length === 0) return;
       const one = await askCrowd('curve', { ...asked, ticked: { ruleIds, placeIds } });
       const all = await askCrowd('curve', { ...asked, ticked: { placeIds } });
-      const curves = { points: one.points, joint: all.points, told: one.told };
+      const curves = { points: one.points, joint: all.points, told: one.told, placeIds };
       if (!stop.signal.aborted) setAnswer({ key, curves });
     };
     ask().catch((error: unknown) => {
@@ -62,7 +64,7 @@ export function useShareCurves(
       if (!stop.signal.aborted) setAnswer({ key, fault });
     });
     return () => stop.abort();
-    // The rules are in the key, whatever list holds them.
+    // Rules and crowd are in the key, whatever holds them.
     // eslint-disable-next-line react-hooks/exhaustive-deps
   }, [tried, key]);
   if (answer?.key !== key) return {};

@@ -16,18 +16,22 @@ export interface StickAddress {
   go: (changes: Partial<Record<'d' | 'rule' | 'd2' | 'people' | 'women', string | undefined>>) => void;
 }
 
+/** A population that ships, or the number of one of the workshop's own. */
+const isCrowd = (id: string): boolean =>
+  CROWDS.some((crowd) => crowd.id === id) || /^[0-9a-f-]{36}$/.test(id);
+
 /** What others may want to see the same way stands in the address of the page. */
 export function useStickAddress(): StickAddress {
   const [params, setParams] = useSearchParams();
   return useMemo(() => {
     const women = Number(params.get('women') ?? DEFAULT_CROWD.women);
-    const people = CROWDS.find(({ id }) => id === params.get('people'));
+    const people = params.get('people') ?? '';
     return {
       dimensionId: params.get('d') ?? undefined,
       rule: params.get('rule') ?? undefined,
       second: params.get('d2') ?? undefined,
       crowd: {
-        populationId: people?.id ?? DEFAULT_CROWD.populationId,
+        populationId: isCrowd(people) ? people : DEFAULT_CROWD.populationId,
         women: women >= 0 && women <= 100 ? Math.round(women) : DEFAULT_CROWD.women,
       },
       go: (changes) =>

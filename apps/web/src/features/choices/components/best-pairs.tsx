@@ -25,7 +25,7 @@ export function BestPairs({ pairs, map, first, second, onTake }: BestPairsProps)
         <caption className="pb-2 text-left font-semibold">Best pairs of values</caption>
         <thead className="text-xs text-ink-3">
           <tr>
-            {[first.label, second.label, 'Seated here', 'Public, all checks'].map((head) => (
+            {[first.label, second.label, 'Seated here', 'Public'].map((head) => (
               <th key={head} scope="col" className={`${CELL} font-medium`}>
                 {head}
               </th>
@@ -43,7 +43,7 @@ export function BestPairs({ pairs, map, first, second, onTake }: BestPairsProps)
               showValue(pair.across, first.unit, style),
               showValue(pair.up, second.unit, style),
             ];
-            const lost = lostAt(map, pair);
+            const [lost, unknown] = [namesAt(map, pair, 'lost'), namesAt(map, pair, 'notKnown')];
             return (
               <tr key={`${pair.across} ${pair.up}`}>
                 <td className={CELL}>
@@ -53,8 +53,9 @@ export function BestPairs({ pairs, map, first, second, onTake }: BestPairsProps)
                   <Measure text={b} />
                 </td>
                 <td className={CELL}>
-                  {pair.served === people ? `all ${people}` : `${pair.served} of ${people}`}
-                  {lost.length > 0 && `, not ${joinNames(lost)}`}
+                  {pair.served === people ? `all ${people} served` : `${pair.served} of ${people} served`}
+                  {lost.length > 0 && `; ${joinNames(lost)} won’t fit`}
+                  {unknown.length > 0 && `; ${joinNames(unknown)} not known`}
                 </td>
                 <td className={CELL}>
                   {pair.share === undefined ? 'not counted yet' : `about ${inHundred(pair.share)}`}
@@ -78,7 +79,7 @@ export function BestPairs({ pairs, map, first, second, onTake }: BestPairsProps)
   );
 }
 
-function lostAt({ across, up, regions }: CastMap, pair: BestPair): string[] {
+function namesAt({ across, up, regions }: CastMap, pair: BestPair, state: 'lost' | 'notKnown'): string[] {
   const [i, j] = [up.indexOf(pair.up), across.indexOf(pair.across)];
-  return regions.filter(({ rooms }) => (rooms[i]?.[j] ?? 0) < 0).map(({ name }) => shortName(name));
+  return regions.filter(({ states }) => states[i]?.[j] === state).map(({ name }) => shortName(name));
 }

@@ -1,7 +1,7 @@
 import { memo } from 'react';
 import { Combobox } from '@/components/combobox.tsx';
 import { Select } from '@/components/select.tsx';
-import { CROWDS, DEFAULT_CROWD, type CrowdChoice } from '@/lib/crowd/crowds.ts';
+import { DEFAULT_CROWD, type CrowdChoice, type CrowdOption } from '@/lib/crowd/crowds.ts';
 
 const MIXES = [
   { value: 50, words: 'men and women equally' },
@@ -15,11 +15,16 @@ const MIXES = [
 
 interface CrowdChooserProps {
   crowd: CrowdChoice;
+  options: readonly CrowdOption[];
   onChange: (crowd: CrowdChoice) => void;
 }
 
 /** Whom a share is about. */
-export const CrowdChooser = memo(function CrowdChooser({ crowd, onChange }: CrowdChooserProps) {
+export const CrowdChooser = memo(function CrowdChooser({
+  crowd,
+  options: crowds,
+  onChange,
+}: CrowdChooserProps) {
   const { populationId, women } = crowd;
   const mixes = MIXES.some(({ value }) => value === women)
     ? MIXES
@@ -29,7 +34,7 @@ export const CrowdChooser = memo(function CrowdChooser({ crowd, onChange }: Crow
       <Combobox
         label="The public"
         value={populationId}
-        choices={CROWDS.map(({ id, words, kind }) => ({ id, words, detail: kind }))}
+        choices={crowds.map(({ id, words, kind }) => ({ id, words, detail: kind }))}
         onChange={(id) => onChange({ women, populationId: id ?? DEFAULT_CROWD.populationId })}
       />
       <Select

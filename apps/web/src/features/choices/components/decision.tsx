@@ -77,7 +77,7 @@ export const Decision = memo(function Decision({
     );
   };
   return (
-    <aside aria-label="The choice" className="min-w-0">
+    <aside aria-label="The choice" className="min-w-0 desk:row-span-2">
       <p className="mb-3 flex items-baseline gap-3 text-4xl font-light tracking-hero">
         <Measure text={now} />
         {suggested !== undefined && (

@@ -1,3 +1,4 @@
+import type { Rejection } from '@settlewright/anthropometry';
 import { memo } from 'react';
 import { Disclosure } from '@/components/disclosure.tsx';
 import { LoadingLine } from '@/components/loading.tsx';
@@ -8,6 +9,8 @@ import { inHundred, showValue } from '../words.ts';
 
 interface PublicWordsProps {
   curves: ShareCurves | undefined;
+  /** The check that turns most away at the present value. */
+  rejection: Rejection | undefined;
   present: number;
   suggested: number | undefined;
   unit: 'mm' | 'deg' | 'N';
@@ -20,16 +23,17 @@ const told = (share: number | undefined) => (share === undefined ? 'not known' :
 /** The share of the public in words: by the shown checks, and by every check at once. */
 export const PublicWords = memo(function PublicWords({
   curves,
+  rejection,
   present,
   suggested,
   unit,
   whole,
   wear,
 }: PublicWordsProps) {
-  const { style } = useChoices();
+  const { ruleBook, style } = useChoices();
   if (!curves) {
     return (
-      <div className="mt-5">
+      <div>
         <LoadingLine words="Counting people" />
       </div>
     );
@@ -37,13 +41,13 @@ export const PublicWords = memo(function PublicWords({
   const values = suggested === undefined ? [present] : [present, suggested];
   const { told: from, points, joint } = curves;
   return (
-    <div className="mt-5 text-sm">
+    <div className="text-sm">
       <p>
         <span className="font-semibold">Share who fit</span> of {whole}, with {wear}.
       </p>
-      <dl className="mt-1 grid w-fit grid-cols-[auto_auto_auto] gap-x-6 gap-y-0.5">
+      <dl className="mt-1 grid w-fit gap-x-6 gap-y-1 tablet:grid-cols-[auto_auto_auto]">
         {values.map((value) => (
-          <div key={value} className="col-span-3 grid grid-cols-subgrid">
+          <div key={value} className="tablet:col-span-3 tablet:grid tablet:grid-cols-subgrid">
             <dt className="text-ink-3">
               at <Measure text={showValue(value, unit, style)} />
             </dt>
@@ -55,6 +59,12 @@ export const PublicWords = memo(function PublicWords({
         ))}
       </dl>
       <p className="mt-1 max-w-text text-ink-2">
+        {rejection && (
+          <>
+            As it stands, {ruleBook.rule(rejection.ruleId).columnName.toLowerCase()} turns most away, about{' '}
+            {inHundred(rejection.lost)}.{' '}
+          </>
+        )}
         All else is held as it is drawn. Ten thousand people are drawn from the survey’s statistics, so a
         share is good to about one in 100 of those surveyed, and less for anybody else.
       </p>

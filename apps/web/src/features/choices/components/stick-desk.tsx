@@ -8,7 +8,9 @@ import { useChoices } from '../choices-view.ts';
 import { commonWords, countsWords } from '../common-words.ts';
 import { stickBands } from '../stick-bands.ts';
 import type { TriedValues } from '../tried-values.ts';
+import type { AskedCrowd } from '../use-crowd.ts';
 import { shareAt, useShareCurves } from '../use-share-curve.ts';
+import { useRejection } from '../use-rejection.ts';
 import { useStickValues } from '../use-stick-values.ts';
 import { inHundred, sayValue, showSize } from '../words.ts';
 import { CrowdChooser } from './crowd-chooser.tsx';
@@ -25,13 +27,14 @@ interface StickDeskProps {
   stick: StoryStick;
   rule: string;
   crowd: CrowdChoice;
+  asked: AskedCrowd;
   onCrowd: (crowd: CrowdChoice) => void;
 }
 
 const WIDTH = 962;
 
 /** The stick, the hand on its plumb line, and the choice beside it. */
-export function StickDesk({ tried, stick, rule, crowd, onCrowd }: StickDeskProps) {
+export function StickDesk({ tried, stick, rule, crowd, asked, onCrowd }: StickDeskProps) {
   const { ruleBook, style } = useChoices();
   const { dimension } = tried;
   const { unit } = dimension;
@@ -40,7 +43,8 @@ export function StickDesk({ tried, stick, rule, crowd, onCrowd }: StickDeskProps
   const values = useStickValues(tried, stick, rule);
   const { rows, ruleIds, present, shown, suggested, answersAt } = values;
   const counted = useMemo(() => [...ruleIds], [ruleIds]);
-  const { curves, fault } = useShareCurves(tried, counted, crowd);
+  const { curves, fault = asked.fault } = useShareCurves(tried, counted, asked.request);
+  const rejection = useRejection(curves, asked.request);
   const bands = useMemo(() => stickBands(stick, ruleBook, style), [stick, ruleBook, style]);
   const layout = useMemo(
     () =>
@@ -59,7 +63,7 @@ export function StickDesk({ tried, stick, rule, crowd, onCrowd }: StickDeskProps
     () => (suggested === undefined ? [] : answersAt(suggested)),
     [answersAt, suggested],
   );
-  const whole = useMemo(() => crowdWords(crowd), [crowd]);
+  const whole = useMemo(() => crowdWords(crowd, asked.options), [crowd, asked]);
   const crowdLines = useMemo(() => whole.split(/(?<=,) /), [whole]);
   const share = curves && shareAt(curves.points, shown);
   const words = [
@@ -73,7 +77,7 @@ export function StickDesk({ tried, stick, rule, crowd, onCrowd }: StickDeskProps
   );
   const below = useMemo(() => [common, ...bands.map((band) => band.words)], [common, bands]);
   return (
-    <div className="grid gap-x-9 gap-y-8 desk:grid-cols-[minmax(0,1fr)_20rem]">
+    <div className="grid gap-x-9 gap-y-6 desk:grid-cols-[minmax(0,1fr)_20rem] desk:grid-rows-[auto_1fr]">
       <div className="min-w-0">
         <div ref={measure} className="relative">
           <StickBoard
@@ -103,6 +107,16 @@ export function StickDesk({ tried, stick, rule, crowd, onCrowd }: StickDeskProps
           />
         </div>
         <StickLegend common={common} bands={bands} />
+      </div>
+      <Decision
+        tried={tried}
+        stick={stick}
+        ruleIds={ruleIds}
+        present={present}
+        suggested={suggested}
+        curves={curves}
+      />
+      <div className="min-w-0">
         {fault && (
           <Notice tone="wont" className="mt-3">
             The shares could not be counted. {fault}
@@ -110,6 +124,7 @@ export function StickDesk({ tried, stick, rule, crowd, onCrowd }: StickDeskProps
         )}
         <PublicWords
           curves={curves}
+          rejection={rejection}
           present={present}
           suggested={suggested}
           unit={unit}
@@ -117,7 +132,7 @@ export function StickDesk({ tried, stick, rule, crowd, onCrowd }: StickDeskProps
           wear={`shoes of ${showSize(CROWD_WEAR.shoeMm, 'mm', style)}, ${CROWD_WEAR.clothing} clothes`}
         />
         <div className="mt-4 max-w-text">
-          <CrowdChooser crowd={crowd} onChange={onCrowd} />
+          <CrowdChooser crowd={crowd} options={asked.options} onChange={onCrowd} />
         </div>
         <div className="mt-4 flex flex-wrap items-start gap-x-8 gap-y-3">
           <StickTable
@@ -132,14 +147,6 @@ export function StickDesk({ tried, stick, rule, crowd, onCrowd }: StickDeskProps
           <SaveStick drawing={drawing} dimension={dimension} words={below} />
         </div>
       </div>
-      <Decision
-        tried={tried}
-        stick={stick}
-        ruleIds={ruleIds}
-        present={present}
-        suggested={suggested}
-        curves={curves}
-      />
     </div>
   );
 }

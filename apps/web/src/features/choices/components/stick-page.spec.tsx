@@ -3,16 +3,19 @@ import { screen, waitFor } from '@testing-library/react';
 import userEvent from '@testing-library/user-event';
 import { describe, expect, it, vi } from 'vitest';
 import type { CrowdTasks } from '@/lib/crowd/crowd-tasks.ts';
-import { signInAs } from '@/test/render-page.tsx';
 import { checkOf, facingBenches, HETTY, showStick } from '../test/show-stick.tsx';
 
-/** A crowd of whom the lower seat always suits more. */
+/** A crowd of whom a lower seat always suits more, and of whom the belly room turns most away. */
 vi.mock('@/lib/crowd/ask-crowd.ts', () => ({
-  askCrowd: (_: 'curve', { values }: CrowdTasks['curve']['asked']) =>
-    Promise.resolve({
-      points: values.map((value) => ({ value, fits: Math.max(0, 1 - value / 1000) })),
-      told: { name: 'People', source: 'a count', cautions: ['They are soldiers.'] },
-    }),
+  askCrowd: (task: 'curve' | 'shares', { values }: CrowdTasks['curve']['asked']) =>
+    Promise.resolve(
+      task === 'shares'
+        ? { rejectsMost: { ruleId: 'TABLE-06', lost: 0.6 } }
+        : {
+            points: values.map((value) => ({ value, fits: Math.max(0, 1 - value / 1000) })),
+            told: { name: 'People', source: 'a count', cautions: ['They are soldiers.'] },
+          },
+    ),
 }));
 
 const heightOf = (document: SetDocument | undefined): number =>
@@ -26,6 +29,7 @@ describe('the plumb line', () => {
     showStick();
     const bob = await slider();
     await waitFor(() => expect(bob).toHaveAttribute('aria-valuetext', expect.stringMatching(/in 100$/)));
+    expect(await screen.findByText(/turns most away, about 60 in 100\./)).toBeVisible();
     expect(bob.getAttribute('aria-valuetext')).toMatch(
       /^.*inch.*; .*(fit|fits|tight|won’t fit).*; about \d+ in 100$/,
     );
@@ -65,7 +69,6 @@ describe('the plumb line', () => {
 
 describe('the choice', () => {
   it('keeps the look with a note: why, by whom and when', async () => {
-    signInAs('owner');
     const onStep = vi.fn<(document: SetDocument, step: string) => void>();
     const user = userEvent.setup();
     showStick({ onStep });

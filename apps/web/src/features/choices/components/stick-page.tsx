@@ -8,6 +8,7 @@ import { Measure } from '@/components/measure.tsx';
 import { Notice } from '@/components/notice.tsx';
 import { PageHeading } from '@/components/page-heading.tsx';
 import { useChoices } from '../choices-view.ts';
+import { useCrowd } from '../use-crowd.ts';
 import { useStick, useTriedValues } from '../use-stick.ts';
 import { EVERY_CHECK, useStickAddress } from '../use-stick-address.ts';
 import { dimensionWords, movingWords, showValue } from '../words.ts';
@@ -72,6 +73,7 @@ function Ways({ roomTo, fitTo }: StickPageProps) {
 function Stick(links: StickPageProps) {
   const { document, ruleBook, style } = useChoices();
   const address = useStickAddress();
+  const asked = useCrowd(address.crowd);
   const offered = useMemo(() => dimensionsOf(document), [document]);
   const choices = useMemo(
     () => offered.map((one) => ({ id: one.id, words: dimensionWords(one) })),
@@ -130,6 +132,7 @@ function Stick(links: StickPageProps) {
             stick={stick}
             rule={rule}
             crowd={address.crowd}
+            asked={asked}
             onCrowd={({ populationId, women }) => address.go({ people: populationId, women: String(women) })}
           />
           <TwoDimensions
@@ -137,6 +140,7 @@ function Stick(links: StickPageProps) {
             offered={offered}
             second={address.second}
             crowd={address.crowd}
+            asked={asked}
             onSecond={(id) => address.go({ d2: id })}
           />
         </>

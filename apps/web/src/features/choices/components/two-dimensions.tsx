@@ -6,11 +6,12 @@ import { Notice } from '@/components/notice.tsx';
 import { RuleHeading } from '@/components/rule-heading.tsx';
 import { crowdWords, type CrowdChoice } from '@/lib/crowd/crowds.ts';
 import { useWidth } from '@/lib/use-width.ts';
-import { bestPairs, type BestPair } from '../cast-map.ts';
+import { bestPairs, type BestPair, type CastMap } from '../cast-map.ts';
 import { useChoices } from '../choices-view.ts';
 import type { TriedValues } from '../tried-values.ts';
+import type { AskedCrowd } from '../use-crowd.ts';
 import { useCastMap } from '../use-cast-map.ts';
-import { dimensionWords, showValue } from '../words.ts';
+import { dimensionWords, shortName, showValue } from '../words.ts';
 import { BestPairs } from './best-pairs.tsx';
 import { MapDrawing } from './map-drawing.tsx';
 
@@ -19,20 +20,28 @@ interface TwoDimensionsProps {
   offered: readonly Dimension[];
   second: string | undefined;
   crowd: CrowdChoice;
+  asked: AskedCrowd;
   onSecond: (id: string | undefined) => void;
 }
 
 const WIDTH = 720;
 
 /** The dimension against another one: where everybody is served, and how many of the public. */
-export function TwoDimensions({ tried, offered, second: secondId, crowd, onSecond }: TwoDimensionsProps) {
+export function TwoDimensions({
+  tried,
+  offered,
+  second: secondId,
+  crowd,
+  asked,
+  onSecond,
+}: TwoDimensionsProps) {
   const { document, replace, style } = useChoices();
   const [measure, width = WIDTH] = useWidth();
   const { dimension: first } = tried;
   const { second, map, shares, done, fault } = useCastMap(
     tried,
     secondId === first.id ? undefined : secondId,
-    crowd,
+    asked.request,
   );
   const now = tried.valueOf(document) ?? first.value;
   const present = useMemo(
@@ -63,8 +72,8 @@ export function TwoDimensions({ tried, offered, second: secondId, crowd, onSecon
         />
         <p className="text-sm text-ink-2">
           Each outline is where that sitter is at least tight by every check that either number moves. The
-          darker the ground, the more of {crowdWords(crowd)} fit every check of a person at once; dotted lines
-          at 25, 50 and 75 in 100.
+          darker the ground, the more of {crowdWords(crowd, asked.options)} fit all of those checks at once;
+          dotted lines at 25, 50 and 75 in 100.
         </p>
       </div>
       {fault && (
@@ -85,10 +94,31 @@ export function TwoDimensions({ tried, offered, second: secondId, crowd, onSecon
               width={width}
             />
             {!shares && !fault && <LoadingLine words="Counting people" />}
+            <MapWords map={map} />
           </div>
           <BestPairs pairs={pairs} map={map} first={first} second={second} onTake={replace && take} />
         </div>
       )}
     </section>
+  );
+}
+
+/** Which checks were asked, and who fits nowhere on the map. */
+function MapWords({ map: { regions, ruleIds } }: { map: CastMap }) {
+  const { ruleBook } = useChoices();
+  const check = (id: string) => ruleBook.rule(id).columnName.toLowerCase();
+  const checks = [...new Set(ruleIds.map(check))].join(', ');
+  return (
+    <div className="mt-2 grid gap-1 text-sm text-ink-2">
+      <p>Checks that either number moves: {checks}.</p>
+      {regions.map(
+        ({ placeId, name, blockedBy }) =>
+          blockedBy && (
+            <p key={placeId} className="text-wont">
+              {shortName(name)} fits nowhere here: even at best {check(blockedBy)} won’t do.
+            </p>
+          ),
+      )}
+    </div>
   );
 }

@@ -10,7 +10,9 @@ import { ARRANGEMENTS, measureSet, type SetDocument } from '@settlewright/geomet
 import rules from '@settlewright/seed-data/fit-rules.json';
 import summary from '@settlewright/seed-data/populations/ansur2.json';
 import { useState } from 'react';
-import { renderPage } from '@/test/render-page.tsx';
+import { renderPage, signInAs, WORKSHOP_ID } from '@/test/render-page.tsx';
+import { server } from '@/test/server.ts';
+import { http, HttpResponse } from 'msw';
 import { ChoicesContext, type ChoicesView } from '../choices-view.ts';
 import { StickPage } from '../components/stick-page.tsx';
 
@@ -94,6 +96,16 @@ function Stick({ onStep, ...view }: Shown) {
   );
 }
 
-/** The page as a route composes it, on a set that follows. */
-export const showStick = (view: Shown = {}, search = '?d=seat-height') =>
-  renderPage(<Stick {...view} />, { path: '/stick', at: `/stick${search}` });
+/** The page as a route composes it, on a set that follows; an owner of a workshop without surveys looks at it. */
+export function showStick(view: Shown = {}, search = '?d=seat-height') {
+  signInAs('owner');
+  server.use(
+    http.get('/api/workshops/:id/populations', () =>
+      HttpResponse.json({ items: [], total: 0, page: 1, pageSize: 200 }),
+    ),
+  );
+  return renderPage(<Stick {...view} />, {
+    path: '/w/:workshopId/stick',
+    at: `/w/${WORKSHOP_ID}/stick${search}`,
+  });
+}

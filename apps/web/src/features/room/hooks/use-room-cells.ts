@@ -36,6 +36,7 @@ export function useRoomCells(lastRevision: Issued | null | undefined, canEdit: b
         menu: [
           { id: 'room', words: 'The room', to: home },
           { id: 'fit', words: 'Fit sheet', to: `${home}/fit` },
+          { id: 'stick', words: 'Story stick', to: `${home}/stick` },
           { id: 'crowd', words: 'Who fits', to: `${home}/crowd` },
           ...(canEdit ? [{ id: 'suggest', words: 'Suggest dimensions', to: `${home}/suggest` }] : []),
           { id: 'revisions', words: 'Revisions', to: `${home}/revisions` },
