@@ -1,18 +1,32 @@
-import type { FitCell, FitSheet } from './fit-sheet.ts';
+import type { FitCell, Outcome, VerdictOutcome } from './fit-sheet.ts';
 import type { RuleBook, RuleConflict } from './rule-book.ts';
 
+/** What of a cell tells whether rules are at odds; a sheet of verdicts alone has it too. */
+type SaidCell = Pick<FitCell, 'ruleId' | 'pieceIds' | 'marks'> & {
+  outcome:
+    | (Pick<VerdictOutcome, 'kind' | 'verdict'> & Partial<Pick<VerdictOutcome, 'value'>>)
+    | Exclude<Outcome, VerdictOutcome>;
+};
+
+/** Cells by where they stand on a sheet. */
+interface SaidSheet<C> {
+  rows: readonly { cells: readonly C[] }[];
+  publicRow: { cells: readonly C[] };
+  piecesAndWays: readonly C[];
+}
+
 /** What one side of a conflict says in a sheet: the worst cell of each of its rules. */
-export interface SideSaid {
+export interface SideSaid<C = FitCell> {
   purpose: string;
-  cells: FitCell[];
+  cells: C[];
 }
 
 /** Two sides that are at odds in a sheet. */
-export interface ConflictFound {
+export interface ConflictFound<C = FitCell> {
   conflict: RuleConflict;
   /** Marks of the pieces that both sides are about. */
   marks: string[];
-  sides: [SideSaid, SideSaid];
+  sides: [SideSaid<C>, SideSaid<C>];
 }
 
 /** Worst first. */
@@ -23,16 +37,20 @@ const RANK = { wontFit: 0, outside: 0, tight: 1, fits: 2, inside: 2 } as const;
  * at least one of them is not met, so that mending it takes from the other. A conflict that names a range of values is
  * at odds wherever the value lies in it.
  *
- * @param sheet - a fit sheet
+ * @param sheet - a fit sheet; of verdicts alone, conflicts at a value are not found
  * @param ruleBook - the rules it was made with
  * @returns conflicts in the order of the rule book, each with the worst that either side says
  */
-export function conflictsIn(sheet: FitSheet, ruleBook: RuleBook): ConflictFound[] {
-  const cells = [...sheet.rows.flatMap((row) => row.cells), ...sheet.publicRow.cells, ...sheet.piecesAndWays];
-  return ruleBook.conflicts.flatMap((conflict): ConflictFound[] => {
+export function conflictsIn<C extends SaidCell>(sheet: SaidSheet<C>, ruleBook: RuleBook): ConflictFound<C>[] {
+  const cells: C[] = [
+    ...sheet.rows.flatMap((row) => row.cells),
+    ...sheet.publicRow.cells,
+    ...sheet.piecesAndWays,
+  ];
+  return ruleBook.conflicts.flatMap((conflict): ConflictFound<C>[] => {
     const [one, other] = conflict.sides.map(({ rules }) =>
       cells.filter((cell) => rules.includes(cell.ruleId) && metOf(cell) !== undefined),
-    ) as [FitCell[], FitCell[]];
+    ) as [C[], C[]];
     const pairs = conflict.sides[1].rules.length === 0 ? alone(conflict, one) : pairsOf(conflict, one, other);
     if (pairs.length === 0) return [];
     return [
@@ -48,12 +66,16 @@ export function conflictsIn(sheet: FitSheet, ruleBook: RuleBook): ConflictFound[
   });
 }
 
-type Pair = readonly [FitCell, FitCell | undefined];
+type Pair<C> = readonly [C, C | undefined];
 
-const alone = (conflict: RuleConflict, cells: readonly FitCell[]): Pair[] =>
+const alone = <C extends SaidCell>(conflict: RuleConflict, cells: readonly C[]): Pair<C>[] =>
   cells.filter((cell) => isInRange(conflict, cell)).map((cell) => [cell, undefined]);
 
-function pairsOf(conflict: RuleConflict, ones: readonly FitCell[], others: readonly FitCell[]): Pair[] {
+function pairsOf<C extends SaidCell>(
+  conflict: RuleConflict,
+  ones: readonly C[],
+  others: readonly C[],
+): Pair<C>[] {
   return ones.flatMap((one) =>
     others
       .filter((other) => one.pieceIds.some((id) => other.pieceIds.includes(id)))
@@ -62,29 +84,30 @@ function pairsOf(conflict: RuleConflict, ones: readonly FitCell[], others: reado
           ? isInRange(conflict, one) || isInRange(conflict, other)
           : metOf(one) === false || metOf(other) === false,
       )
-      .map((other): Pair => [one, other]),
+      .map((other): Pair<C> => [one, other]),
   );
 }
 
-function isInRange({ atValue }: RuleConflict, { ruleId, outcome }: FitCell): boolean {
+function isInRange({ atValue }: RuleConflict, { ruleId, outcome }: SaidCell): boolean {
   if (!atValue || atValue.rule !== ruleId || outcome.kind !== 'verdict') return false;
+  if (outcome.value === undefined) return false;
   return outcome.value >= atValue.lowerMm - 0.1 && outcome.value <= atValue.upperMm + 0.1;
 }
 
 /** Whether a cell is met; undefined where that cannot be told. */
-function metOf({ outcome }: FitCell): boolean | undefined {
+function metOf({ outcome }: SaidCell): boolean | undefined {
   if (outcome.kind === 'clause') return outcome.inside;
   if (outcome.kind !== 'verdict' || outcome.verdict === 'notKnown') return undefined;
   return outcome.verdict === 'fits';
 }
 
-function rankOf({ outcome }: FitCell): number {
+function rankOf({ outcome }: SaidCell): number {
   if (outcome.kind === 'clause') return RANK[outcome.inside ? 'inside' : 'outside'];
   return outcome.kind === 'verdict' && outcome.verdict !== 'notKnown' ? RANK[outcome.verdict] : RANK.fits;
 }
 
-function worstOfEach(cells: readonly FitCell[]): FitCell[] {
-  const worst = new Map<string, FitCell>();
+function worstOfEach<C extends SaidCell>(cells: readonly C[]): C[] {
+  const worst = new Map<string, C>();
   for (const cell of cells) {
     const known = worst.get(cell.ruleId);
     if (known === undefined || rankOf(cell) < rankOf(known)) worst.set(cell.ruleId, cell);
@@ -92,7 +115,7 @@ function worstOfEach(cells: readonly FitCell[]): FitCell[] {
   return [...worst.values()];
 }
 
-function marksOf(pairs: readonly Pair[]): string[] {
+function marksOf(pairs: readonly Pair<SaidCell>[]): string[] {
   const marks = pairs.flatMap(([one, other]) =>
     one.marks.filter((_, i) => !other || other.pieceIds.includes(one.pieceIds[i] ?? '')),
   );

@@ -2,6 +2,7 @@ import type { LengthStyle } from '@settlewright/geometry';
 import { Pack } from '../../paper/pack';
 import { drawFrame, type TitleCell } from '../../paper/title-block';
 import type { FitSheetPaper } from './fit-sheet-paper';
+import { drawAtOdds } from './at-odds';
 import { drawGrid } from './grid';
 import { drawHeading } from './heading';
 import { Flow } from './flow';
@@ -26,6 +27,7 @@ export function fitSheetPdf(input: FitSheetPaper): Buffer {
   drawHeading(flow, input);
   drawGrid(flow, input);
   drawPieces(flow, input);
+  drawAtOdds(flow, input);
   drawSources(flow, input);
   pack.eachSheet((sheet, number, count) => drawFrame(sheet, titleCells(input, number, count)));
   return pack.bytes();

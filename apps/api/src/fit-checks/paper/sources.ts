@@ -1,9 +1,10 @@
 import { type Rule, SOURCE_MARK_WORDS } from '@settlewright/anthropometry';
 import { linesNeeded, paragraph, type Prose } from '../../paper/paragraph';
-import { leading, PEN } from '../../paper/sheet';
+import { leading } from '../../paper/sheet';
 import { ruleOf, type ShownCell } from '../shown-sheet';
 import type { FitSheetPaper } from './fit-sheet-paper';
 import type { Flow } from './flow';
+import { drawSectionHeading } from './section-heading';
 
 const GUTTER_MM = 7;
 const NUMBER_MM = 6.5;
@@ -22,22 +23,14 @@ export function drawSources(flow: Flow, input: FitSheetPaper): void {
       { text: `${rule.id}, ${rule.sourceWord}: ${numbers.join(', ')}` },
     ];
   });
-  heading(flow, `Rules, version ${input.sheet.ruleVersion}, and the numbers of their sources`);
+  drawSectionHeading(flow, `Rules, version ${input.sheet.ruleVersion}, and the numbers of their sources`);
   drawColumns(flow, 3, ruleLines, 0);
   flow.y += 4;
-  heading(flow, 'Sources');
+  drawSectionHeading(flow, 'Sources');
   drawColumns(flow, 2, sources, NUMBER_MM);
 }
 
 const sourceWords = ({ cite, mark }: Rule['sources'][number]) => `${cite} (${SOURCE_MARK_WORDS[mark]})`;
-
-function heading(flow: Flow, words: string): void {
-  flow.need(26);
-  flow.sheet.line(flow.left, flow.y, flow.right, flow.y, { pen: PEN.edge });
-  flow.y += LINE + 1.6;
-  flow.sheet.text(words, flow.left, flow.y, { size: 11, weight: 600 });
-  flow.y += 2.4;
-}
 
 /** Entries in rows of so many columns; with room for a number before each where asked. */
 function drawColumns(flow: Flow, columns: number, entries: readonly Prose[], numberMm: number): void {
