@@ -21,6 +21,10 @@ describe('StandInDialog', () => {
     const cannot = await screen.findByRole('heading', { name: 'This sit cannot tell' });
     const group = within(cannot.closest('section') as HTMLElement);
     expect(group.getAllByText(/Tape .* instead|Weigh .* instead/).length).toBeGreaterThan(0);
+    expect(
+      group.getAllByText(/this sit cannot tell\. (Tape|Weigh) (Hetty|the stand-in)/).length,
+    ).toBeGreaterThan(0);
+    expect(screen.queryByText(/\bThe’s\b|at The\b/)).toBeNull();
     // Her back of knee was taken, his is predicted from a height half a head above hers.
     expect(screen.getAllByText(/back of knee \+/).length).toBeGreaterThan(0);
   });

@@ -35,7 +35,7 @@ function Group({ title, checks, pair }: { title: string; checks: readonly StandI
               </p>
               {parts.length > 0 && (
                 <p className="text-sm text-ink-2">
-                  {pair.standIn} against {pair.castMember}:{' '}
+                  {pair.standIn ?? 'The stand-in'} against {pair.castMember}:{' '}
                   {parts.map((part) => partWords(part, style)).join('; ')}.
                 </p>
               )}
@@ -63,7 +63,7 @@ function Trial({ basis }: { basis: FitBasis }) {
     seat && known && place
       ? standIn({ place, castMember: seat.person, standIn: known, ruleBook, model, settings })
       : [];
-  const pair = { castMember: seat?.name ?? '', standIn: chosen?.name ?? 'The stand-in' };
+  const pair = { castMember: seat?.name ?? '', standIn: chosen?.name };
   const placeWords = (placeId: string) => {
     const row = sheet.rows.find((one) => one.placeId === placeId);
     return row ? `${row.mark}, place ${row.place}` : '';

@@ -7,25 +7,29 @@ import {
 import { formatMass, type LengthStyle } from '@settlewright/geometry';
 import { amountText, shortName } from '../amounts.ts';
 
+/** Whom a sentence is about; without a name the one who tries is "the stand-in". */
 export interface Pair {
   castMember: string;
-  standIn: string;
+  standIn?: string | undefined;
 }
+
+const capital = (words: string): string => words.charAt(0).toUpperCase() + words.slice(1);
 
 /** What one sit says of one check, in a sentence or two. */
 export function standInWords(check: StandInCheck, pair: Pair, unit: RuleUnit, style: LengthStyle): string {
-  const [them, sitter] = [shortName(pair.castMember), shortName(pair.standIn)];
+  const them = shortName(pair.castMember);
+  const sitter = pair.standIn === undefined ? 'the stand-in' : shortName(pair.standIn);
   if (check.answer === 'carriesOver') {
-    return `What ${sitter} finds holds for ${them}.${sideWords(check, them, sitter)}`;
+    return `what ${sitter} finds holds for ${them}.${sideWords(check, them, sitter)}`;
   }
-  if (check.answer === 'cannotTell') return `This sit cannot tell. ${instead(check, them, sitter)}`.trim();
-  const misleads = check.misleads ? `By itself the sit misleads. ` : '';
+  if (check.answer === 'cannotTell') return `this sit cannot tell. ${instead(check, them, sitter)}`.trim();
+  const misleads = check.misleads ? `by itself the sit misleads. ` : '';
   return `${misleads}${correction(check, them, sitter, unit, style)}${sideWords(check, them, sitter)}`;
 }
 
 function sideWords({ side }: StandInCheck, them: string, sitter: string): string {
   if (side === 'safe') return ` Room enough for ${sitter} is enough for ${them}.`;
-  if (side === 'unsafe') return ` ${sitter} has more room here than ${them}.`;
+  if (side === 'unsafe') return ` ${capital(sitter)} has more room here than ${them}.`;
   return '';
 }
 
@@ -50,7 +54,7 @@ function correction(
   const [verb, joint] = best < 0 ? ['Take', 'off'] : ['Add', 'to'];
   const ends = [low, high].map((end) => (best < 0 ? -end : end)).sort((a, b) => a - b);
   const known = high - low < 1 ? '' : ` (${ends.map(show).join(' to ')})`;
-  return `${verb} ${show(Math.abs(best))}${known} ${joint} the room measured at ${sitter}, to get ${them}’s.`;
+  return `${verb} ${show(Math.abs(best))}${known} ${joint} the room that ${sitter} finds, to get ${them}’s.`;
 }
 
 /** "Knee height 2″ more (1½″ to 2½″)": what differs between the two bodies. */
