@@ -36,6 +36,9 @@ export function firstName(name: string): string {
   return mannequin ?? name.split(' ')[0] ?? name;
 }
 
+/** Ends a sentence that may have its full stop already. */
+export const sentence = (text: string): string => text.replace(/[.\s]*$/, '.');
+
 /** "about 23 in 100", "fewer than 1 in 100". */
 export function aboutInHundred(share: number): string {
   const n = Math.round(share * 100);

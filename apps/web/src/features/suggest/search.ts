@@ -49,7 +49,7 @@ export const SEARCH_PEOPLE = 4000;
 /** The same people each time. */
 const SEED = 1;
 /** How long it works before it speaks again, milliseconds. */
-const SPEAK_EVERY_MS = 120;
+const SPEAK_EVERY_MS = 250;
 
 interface Ground {
   model: BodyModel;

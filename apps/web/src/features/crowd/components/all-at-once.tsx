@@ -25,7 +25,7 @@ export function AllAtOnce({ outcome, checks, of }: AllAtOnceProps) {
   return (
     <div>
       <p className="tracking-hero">
-        <span className="text-xl font-light">about </span>
+        {fits.mixed.value > 0 && <span className="text-xl font-light">about </span>}
         <span className={/^\d/.test(value) ? 'text-4xl font-light' : 'text-2xl font-light'}>{value}</span>
         <span className="text-xl font-light"> in 100 fit {counted}</span>
       </p>

@@ -1,4 +1,4 @@
-import { PERSON_CHECKS } from '@settlewright/anthropometry';
+import { PERSON_CHECKS, type Lost } from '@settlewright/anthropometry';
 import { RuleHeading } from '@/components/rule-heading.tsx';
 import { Button } from '@/components/button.tsx';
 import { useCrowdView } from '../crowd-view.ts';
@@ -41,7 +41,7 @@ export function CheckShares({ checks, ticked, onTick }: CheckSharesProps) {
         {checks.map(({ ruleId, outcome, lost }) => (
           <li
             key={ruleId}
-            className="grid items-center gap-x-4 gap-y-1 border-t border-rule py-2 tablet:grid-cols-[13rem_minmax(8rem,1fr)_9rem_minmax(0,1.4fr)]"
+            className="grid items-center gap-x-4 gap-y-1 border-t border-rule py-2 tablet:grid-cols-[11rem_minmax(6rem,1fr)_12.5rem_minmax(0,1.4fr)]"
           >
             <label className="flex min-h-8 items-center gap-3 font-medium">
               <input
@@ -60,7 +60,7 @@ export function CheckShares({ checks, ticked, onTick }: CheckSharesProps) {
                   {ofHundred(outcome.atLeastTight.mixed)} at least tight
                 </p>
                 <p className="text-sm text-ink-2">
-                  {lost ? `Lost: ${lost.words}` : 'Nobody is lost'}
+                  {lostWords(lost)}
                   {sexWords(outcome.fits) && <span className="text-ink-3"> ({sexWords(outcome.fits)})</span>}
                 </p>
               </>
@@ -78,6 +78,9 @@ export function CheckShares({ checks, ticked, onTick }: CheckSharesProps) {
     </section>
   );
 }
+
+const lostWords = (lost: Lost | undefined): string =>
+  lost === undefined ? 'Nobody is lost' : lost.share === 1 ? 'Lost: everybody' : `Lost: ${lost.words}`;
 
 /** Checks of a person that have nothing to say of this set. */
 function Silent({ told }: { told: readonly string[] }) {

@@ -18,6 +18,9 @@ vi.mock('@/lib/crowd/ask-crowd.ts', () => ({
     desk.answer(task, { ...asked, count: 1000 } as never),
 }));
 
+/** People are really drawn and counted here, which takes a busy machine a while. */
+const COUNTED = { timeout: 15_000 };
+
 const bay = ARRANGEMENTS.find(({ id }) => id === 'facing-benches')?.build() as SetDocument;
 const ruleBook = loadRuleBook(rules);
 
@@ -45,7 +48,7 @@ function show(document: SetDocument = bay, search = '') {
 describe('who fits', () => {
   it('says the share with its doubt, its source and its cautions, and who is lost', async () => {
     show();
-    expect(await screen.findByText(/in 100 fit all checks at once/)).toBeVisible();
+    expect(await screen.findByText(/in 100 fit all checks at once/, {}, COUNTED)).toBeVisible();
     const people = screen.getByRole('region', { name: 'About these people' });
     expect(within(people).getByText(/Source: /)).toBeVisible();
     expect(within(people).getByText(/shoes of 25 mm/)).toBeVisible();
@@ -57,20 +60,22 @@ describe('who fits', () => {
 
   it('counts only the ticked checks at once, by the keyboard too', async () => {
     const { user } = show();
-    await screen.findByText(/fit all checks at once/);
+    await screen.findByText(/fit all checks at once/, {}, COUNTED);
     const boxes = screen.getAllByRole('checkbox');
     const rows = boxes.length;
     boxes[0]?.focus();
     await user.keyboard(' ');
-    expect(await screen.findByText(new RegExp(`${rows - 1} of ${rows} checks at once`))).toBeVisible();
+    expect(
+      await screen.findByText(new RegExp(`${rows - 1} of ${rows} checks at once`), {}, COUNTED),
+    ).toBeVisible();
     expect(boxes[0]).toHaveFocus();
     await user.click(screen.getByRole('button', { name: 'Count all checks' }));
-    await waitFor(() => expect(screen.getByText(/all checks at once/)).toBeVisible());
+    await waitFor(() => expect(screen.getByText(/all checks at once/)).toBeVisible(), COUNTED);
   });
 
   it('keeps the people in the address', async () => {
     show(bay, '?people=us-soldiers-2012&women=0');
-    expect(await screen.findByText(/in 100 fit all checks at once/)).toBeVisible();
+    expect(await screen.findByText(/in 100 fit all checks at once/, {}, COUNTED)).toBeVisible();
     expect(screen.getByRole('slider', { name: 'Women of 100 people' })).toHaveValue('0');
     expect(screen.getByRole('region', { name: 'About these people' })).toHaveTextContent(/soldiers/i);
   });
@@ -100,7 +105,7 @@ describe('who fits', () => {
       }),
     );
     const { user } = show();
-    await user.click(await screen.findByRole('button', { name: 'Count a million' }));
+    await user.click(await screen.findByRole('button', { name: 'Count a million' }, COUNTED));
     const board = await screen.findByRole('progressbar', { name: 'Counting a million' });
     expect(board).toHaveAttribute('aria-valuetext', '12 of 40 parts counted');
     expect(sent).toEqual([
@@ -127,7 +132,7 @@ describe('who fits', () => {
     ];
     show();
     expect(
-      await screen.findByText(/About 34.2 \(34.2 to 34.3\) in 100 fit all checks at once/),
+      await screen.findByText(/About 34.2 \(34.2 to 34.3\) in 100 fit all checks at once/, {}, COUNTED),
     ).toBeVisible();
     expect(screen.queryByRole('button', { name: 'Count a million' })).toBeNull();
   });

@@ -6,7 +6,7 @@ import { Notice } from '@/components/notice.tsx';
 import { PageHeading } from '@/components/page-heading.tsx';
 import { PopulationFields } from '@/components/population-fields.tsx';
 import { announce } from '@/lib/announce.ts';
-import { DEFAULT_CROWD, type CrowdChoice } from '@/lib/crowd/crowds.ts';
+import { CROWDS, crowdWords, DEFAULT_CROWD, type CrowdChoice } from '@/lib/crowd/crowds.ts';
 import { useOwnCrowd, useOwnCrowds } from '@/lib/crowd/own-crowds.ts';
 import { usePageTitle } from '@/lib/page-title.ts';
 import { useCrowdView } from '../crowd-view.ts';
@@ -120,7 +120,7 @@ function Counted() {
           />
           <PlaceShares places={joint.shares.places} />
           {ticked.size > 0 && <CountMillion crowd={crowd} ruleIds={isPart ? [...ticked] : undefined} />}
-          <CrowdCaution shares={every.shares} />
+          <CrowdCaution name={crowdWords(crowd, [...own, ...CROWDS])} shares={every.shares} />
         </div>
       )}
     </>

@@ -18,7 +18,7 @@ export function PlaceShares({ places }: { places: Shares['places'] }) {
           return (
             <li
               key={placeId}
-              className="grid min-h-10 grid-cols-[6rem_minmax(0,1fr)_9.5rem] items-center gap-x-4 border-t border-rule py-1.5"
+              className="grid min-h-10 grid-cols-[6rem_minmax(0,1fr)] items-center gap-x-4 phone:grid-cols-[6rem_minmax(0,1fr)_12.5rem] border-t border-rule py-1.5"
             >
               <span className="font-medium">
                 {markOf(pieceId)}, place {place}
@@ -26,13 +26,13 @@ export function PlaceShares({ places }: { places: Shares['places'] }) {
               {outcome.kind === 'shares' ? (
                 <>
                   <ShareBar fits={outcome.fits.mixed} atLeastTight={outcome.atLeastTight.mixed} />
-                  <span className="text-sm">
+                  <span className="text-sm max-phone:col-start-2">
                     {ofHundred(outcome.fits.mixed)} fit, {ofHundred(outcome.atLeastTight.mixed)} at least
                     tight
                   </span>
                 </>
               ) : (
-                <span className="col-span-2 text-sm text-ink-2">not known</span>
+                <span className="text-sm phone:col-span-2 text-ink-2">not known</span>
               )}
             </li>
           );

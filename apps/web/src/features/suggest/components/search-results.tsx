@@ -2,7 +2,7 @@ import type { Dimension, FreeDimension } from '@settlewright/geometry';
 import { useMemo } from 'react';
 import { Notice } from '@/components/notice.tsx';
 import { RuleHeading } from '@/components/rule-heading.tsx';
-import { dimensionValue, joinWords } from '@/lib/dimension-words.ts';
+import { dimensionValue, joinWords, sentence } from '@/lib/dimension-words.ts';
 import { checkWords, effectsOf } from '../effects.ts';
 import type { SearchTold } from '../search.ts';
 import { useSuggestView } from '../suggest-view.ts';
@@ -14,6 +14,8 @@ interface SearchResultsProps {
   told: SearchTold;
   dimensions: readonly Dimension[];
   free: readonly FreeDimension[];
+  /** "US adults 2015–16, men and women equally". */
+  crowdName: string;
   /** True once it has ended or was stopped. */
   isOver: boolean;
   /** Hears the name of the step that was taken. */
@@ -21,7 +23,7 @@ interface SearchResultsProps {
 }
 
 /** What the search found: up to three answers, who stands in the way, and keeping the look. */
-export function SearchResults({ told, dimensions, free, isOver, onTaken }: SearchResultsProps) {
+export function SearchResults({ told, dimensions, free, crowdName, isOver, onTaken }: SearchResultsProps) {
   const { document, check, ruleBook, style, replace } = useSuggestView();
   const { suggestion, counted, people } = told;
   const { answers, present, blame } = suggestion;
@@ -86,7 +88,7 @@ export function SearchResults({ told, dimensions, free, isOver, onTaken }: Searc
             {counted.length === 0
               ? 'None of these dimensions changes a check of the public.'
               : `Counted at once: ${joinWords(counted.map((id) => checkWords(ruleBook, id)))}. The other checks do not hang on these dimensions.`}{' '}
-            {people.name}, {people.source} {people.cautions.join(' ')}
+            {[crowdName, people.source, ...people.cautions].map(sentence).join(' ')}
           </p>
         </section>
       )}

@@ -7,6 +7,9 @@ import { server } from '@/test/server.ts';
 import type { SearchAsked, SearchTold } from '../search.ts';
 import { bay, searchAtOnce, Shown } from '../test/show-suggest.tsx';
 
+/** A short search is really made, which takes a busy machine a while. */
+const FOUND = { timeout: 15_000 };
+
 const asked: SearchAsked[] = [];
 let isHeld = false;
 
@@ -78,7 +81,7 @@ describe('suggested dimensions', () => {
     const onReplace = vi.fn();
     const { user } = show({ onReplace });
     await user.click(screen.getByRole('button', { name: 'Search' }));
-    const best = await screen.findByRole('region', { name: 'Best found' });
+    const best = await screen.findByRole('region', { name: 'Best found' }, FOUND);
     expect(within(best).getByText(/sitters (is|are) at least tight in every check/)).toBeVisible();
     expect(within(best).getAllByText(/Hetty|Marcus/).length).toBeGreaterThan(0);
     expect(screen.getByText('No choice of these dimensions serves everyone')).toBeVisible();
@@ -94,7 +97,7 @@ describe('suggested dimensions', () => {
     const onReplace = vi.fn();
     const { user } = show({ onReplace });
     await user.click(screen.getByRole('button', { name: 'Search' }));
-    await user.type(await screen.findByLabelText('Why'), 'The photograph shows it.');
+    await user.type(await screen.findByLabelText('Why', {}, FOUND), 'The photograph shows it.');
     await user.click(screen.getByRole('button', { name: 'Keep as it is, with a note' }));
     const [document] = onReplace.mock.lastCall as [typeof bay];
     expect(document.pieces).toEqual(bay.pieces);
@@ -108,7 +111,7 @@ describe('suggested dimensions', () => {
     isHeld = true;
     const { user } = show();
     await user.click(screen.getByRole('button', { name: 'Search' }));
-    await screen.findByRole('region', { name: 'Best found' });
+    await screen.findByRole('region', { name: 'Best found' }, FOUND);
     expect(screen.getByRole('progressbar')).toBeVisible();
     expect(screen.queryByRole('button', { name: /Take it/ })).toBeNull();
     await user.click(screen.getByRole('button', { name: /Stop and keep/ }));
@@ -121,13 +124,13 @@ describe('suggested dimensions', () => {
     isHeld = true;
     const { user, unmount } = show();
     await user.click(screen.getByRole('button', { name: 'Search' }));
-    await screen.findByRole('region', { name: 'Best found' });
+    await screen.findByRole('region', { name: 'Best found' }, FOUND);
     unmount();
     isHeld = false;
     show();
     await waitFor(() => expect(asked).toHaveLength(2));
     expect(asked[1]?.known.length).toBeGreaterThan(10);
-    expect(await screen.findByRole('region', { name: 'Best found' })).toBeVisible();
+    expect(await screen.findByRole('region', { name: 'Best found' }, FOUND)).toBeVisible();
   });
 
   it('is for those who decide the dimensions', () => {

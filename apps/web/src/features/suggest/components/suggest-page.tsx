@@ -1,10 +1,12 @@
 import { dimensionsOf } from '@settlewright/geometry';
-import { useEffect, useMemo, useState } from 'react';
+import { useEffect, useMemo, useRef, useState } from 'react';
 import { Link } from 'react-router-dom';
 import { Button } from '@/components/button.tsx';
 import { EmptyState } from '@/components/empty-state.tsx';
 import { Notice } from '@/components/notice.tsx';
 import { PageHeading } from '@/components/page-heading.tsx';
+import { announce } from '@/lib/announce.ts';
+import { CROWDS, crowdWords } from '@/lib/crowd/crowds.ts';
 import { useOwnCrowd, useOwnCrowds } from '@/lib/crowd/own-crowds.ts';
 import { usePageTitle } from '@/lib/page-title.ts';
 import { useSession } from '@/lib/session.ts';
@@ -57,6 +59,7 @@ function Searching() {
   const ownCrowd = useOwnCrowd(form.crowd?.populationId ?? '');
   const { run, start, stop } = useSearch(userId, setId);
   const [taken, setTaken] = useState<string>();
+  const found = useRef<HTMLDivElement>(null);
 
   const dimensions = useMemo(() => dimensionsOf(document), [document]);
   const free = useMemo(() => freeOf(form, dimensions, style), [form, dimensions, style]);
@@ -90,10 +93,19 @@ function Searching() {
     // eslint-disable-next-line react-hooks/exhaustive-deps
   }, [ownCrowd.isPending]);
 
-  const isRunning = run?.state === 'running';
+  const state = run?.state;
+  useEffect(() => {
+    if (state === 'done' || state === 'stopped') announce('The answers are there.');
+  }, [state]);
+
+  const isRunning = state === 'running';
   const isStale = run !== undefined && run.question !== question;
   const nothing = free.length === 0 || (served.length === 0 && !crowd);
-  const begin = () => start({ form, question, asked, ...knownOf(kept, question) });
+  const begin = () => {
+    setTaken(undefined);
+    start({ form, question, asked, ...knownOf(kept, question) });
+    found.current?.scrollIntoView({ block: 'start' });
+  };
   return (
     <>
       <div className="grid gap-x-12 gap-y-8 tablet:grid-cols-2">
@@ -123,13 +135,13 @@ function Searching() {
           </div>
         </div>
       </div>
-      <div className="mt-10" aria-live="polite">
+      <div ref={found} className="mt-10 min-h-16 scroll-mt-20">
         {run?.state === 'failed' && (
           <Notice tone="wont" title="The search failed">
             {run.fault}
           </Notice>
         )}
-        {isRunning && <SearchProgress run={run} onStop={stop} />}
+        {run && isRunning && <SearchProgress run={run} onStop={stop} />}
         {isStale && !isRunning && (
           <Notice className="mb-6" title={taken && 'Taken'}>
             {taken
@@ -147,6 +159,7 @@ function Searching() {
           dimensions={dimensions}
           free={run.asked.free}
           isOver={!isRunning}
+          crowdName={form.crowd ? crowdWords(form.crowd, [...own, ...CROWDS]) : ''}
           onTaken={setTaken}
         />
       )}
