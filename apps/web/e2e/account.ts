@@ -10,6 +10,7 @@ export const DEMO = {
   reviewer: { name: 'Hugo Mbeki-Stone', email: 'hugo@ropewalk.example' },
 } as const;
 const DEMO_PASSWORD = 'larch-junction';
+const OWN_PASSWORD = 'oak-and-moquette';
 
 /** Nothing that is made here meets what an earlier run made. */
 export const unique = (word: string): string => `${word} ${randomBytes(3).toString('hex')}`;
@@ -31,7 +32,7 @@ export async function signUp(page: Page, word: string): Promise<{ email: string;
   await page.getByLabel('Your name').fill('Ida Marlowe-Finch');
   await page.getByLabel('Workshop').fill(account.workshop);
   await page.getByLabel('E-mail').fill(account.email);
-  await page.getByLabel('Password', { exact: true }).fill('oak-and-moquette');
+  await page.getByLabel('Password', { exact: true }).fill(OWN_PASSWORD);
   await page.getByRole('button', { name: 'Start the workshop' }).click();
   await page.getByRole('heading', { name: 'Productions', level: 1 }).waitFor();
   return account;
@@ -45,8 +46,11 @@ export interface Member {
   put: <T>(path: string, body: unknown) => Promise<T>;
 }
 
+/** A session without a browser of somebody who signed up here. */
+export const openOwner = (email: string): Promise<Member> => openMember(email, OWN_PASSWORD);
+
 /** A session of a member of the demonstration workshop without a browser. */
-export async function openMember(email: string): Promise<Member> {
+export async function openMember(email: string, password = DEMO_PASSWORD): Promise<Member> {
   let token = '';
   async function request<T>(method: 'GET' | 'POST' | 'PUT', path: string, body?: unknown): Promise<T> {
     const response = await fetch(`${environment('PRODUCT_URL')}/api${path}`, {
@@ -66,7 +70,7 @@ export async function openMember(email: string): Promise<Member> {
     '/auth/sign-in',
     {
       email,
-      password: DEMO_PASSWORD,
+      password,
     },
   );
   token = session.accessToken;
