@@ -73,7 +73,7 @@ export function AskedPlan({ document, onRoute, onTurning }: AskedPlanProps) {
     ...(turningAt && { turningAt: drag?.of === 'turning' ? drag.spot : turningAt }),
   };
   return (
-    <figure>
+    <figure className="self-start desk:sticky desk:top-20">
       {/* Decoration for the keyboard: the fields beside it say and change the same. */}
       <div data-plan="" role="presentation" className={route && 'cursor-crosshair'} onClick={press}>
         <DrawingSvg drawing={plan} pxPerMm={pxPerMm} className="h-auto max-w-full bg-sheet">

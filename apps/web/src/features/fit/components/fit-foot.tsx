@@ -6,7 +6,7 @@ import { FitGrid } from './fit-grid.tsx';
 import { FitCaution, FitConfidence } from './fit-key.tsx';
 import { FitPeople } from './fit-people.tsx';
 import { FitStrip } from './fit-strip.tsx';
-import { MeasureNext } from './measure-next.tsx';
+import { MeasureNextLine } from './measure-next.tsx';
 
 interface FitFootProps {
   isOpen: boolean;
@@ -68,10 +68,8 @@ export function FitFoot({ isOpen, onToggle, shortcut, line, pageTo }: FitFootPro
           <div className="tablet:hidden">
             <FitPeople />
           </div>
-          <div className="max-h-24 shrink-0 overflow-y-auto max-tablet:max-h-none">
-            <MeasureNext level={3} />
-          </div>
           <div className="shrink-0 py-1.5">
+            <MeasureNextLine />
             <FitConfidence small />
             <div className="max-desk:hidden">
               <FitCaution small />

@@ -5,7 +5,7 @@ import { MemoryRouter } from 'react-router-dom';
 import { describe, expect, it, vi } from 'vitest';
 import { answerNext, type NextQuestion } from '../next/next-question.ts';
 import { basis, showSheet } from '../test/show-sheet.tsx';
-import { MeasureNext } from './measure-next.tsx';
+import { MeasureNext, MeasureNextLine } from './measure-next.tsx';
 
 // There is no worker here; the same question is answered on the spot.
 vi.mock('../next/ask-next.ts', () => {
@@ -22,14 +22,26 @@ const list = (
   </MemoryRouter>
 );
 
-describe('MeasureNext', () => {
+describe('MeasureNext', { timeout: 30_000 }, () => {
   it('names the measures of each person in doubt and leads to their fields', async () => {
     showSheet(list, { basis, personTo });
-    const region = await screen.findByText('Marcus Adeyemi-Rowe', {}, { timeout: 8000 });
+    const region = await screen.findByText('Marcus Adeyemi-Rowe', {}, { timeout: 20_000 });
     const line = within(region.closest('li') as HTMLElement);
     const [first] = line.getAllByRole('link');
     expect(first).toHaveAttribute('href', expect.stringMatching(/^\/people\?edit=marcus&field=[a-z_]+$/));
     expect(line.getByText(/(settles about|may settle) .* in doubt/)).toBeVisible();
+  });
+
+  it('says the same in one line', async () => {
+    const line = (
+      <MemoryRouter>
+        <MeasureNextLine />
+      </MemoryRouter>
+    );
+    showSheet(line, { basis, personTo });
+    expect(await screen.findByText(/Marcus: /, {}, { timeout: 20_000 })).toHaveTextContent(
+      /^Measure next\. .*Marcus: [a-z ]+, enter it for Marcus Adeyemi-Rowe.*\.$/,
+    );
   });
 
   it('says nothing to readers who may not see measures', () => {

@@ -2,7 +2,7 @@ import type { Spot } from '@settlewright/geometry';
 import { useRef, type PointerEvent } from 'react';
 
 const RADIUS_PX = 9;
-const HIT_PX = 18;
+const HIT_PX = 26;
 const TEXT_PX = 12;
 
 interface SpotHandleProps {
