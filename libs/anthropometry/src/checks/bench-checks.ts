@@ -233,6 +233,9 @@ export const lumbarHeight: PieceCheck = {
   ),
 };
 
+/** Said on the ledger of a back without a recess, beside the pass line. */
+const FLAT = 'the back is flat; a recess is better';
+
 /**
  * Room for the pelvis: how far the back gives way a little over the seat.
  *
@@ -241,7 +244,7 @@ export const lumbarHeight: PieceCheck = {
 export const pelvisRoom: PieceCheck = {
   id: 'BACK-04',
   ask: eachBack(({ recessMm }, rule) =>
-    plainQuestion('back gives way by', recessMm, {
+    plainQuestion(recessMm === 0 ? FLAT : 'back gives way by', recessMm, {
       lower: fixedSide(ruleNumber(rule, 'pass'), ruleNumber(rule, 'fail')),
     }),
   ),

@@ -547,3 +547,14 @@ describe('the public, read at the end each rule protects', () => {
     expect(-(sunk?.value ?? 0)).toBeCloseTo((0.25 * pressure * 100) / first, 4);
   });
 });
+
+describe('BACK-04 of a flat back', () => {
+  const said = (recessMm: number) =>
+    verdictOf(pieceCell('BACK-04', set({ benches: [bench({ lumbar: { apexMm: 0, recessMm } })] })));
+
+  it('is tight and says in words what would be better', () => {
+    expect(said(0).verdict).toBe('tight');
+    expect(said(0).setLedger[0]?.label).toBe('the back is flat; a recess is better');
+    expect(said(10).setLedger[0]?.label).toBe('back gives way by');
+  });
+});
