@@ -20,7 +20,7 @@ export interface Region {
 export interface CastMap {
   across: number[];
   up: number[];
-  /** Rules of a person that either number moves. */
+  /** Rules of a person that were looked at. */
   ruleIds: string[];
   regions: Region[];
   placesAt: PlaceSituation[][][];
@@ -42,6 +42,8 @@ interface MapInput {
   up: readonly number[];
   documentAt: (across: number, up: number) => SetDocument | undefined;
   check: (document: SetDocument) => FitSheet;
+  /** Rules to look at; every rule of a person that either number moves when absent. */
+  shown?: ReadonlySet<string> | undefined;
 }
 
 type Said = Map<string, { margin: number; verdict: Verdict }>;
@@ -51,7 +53,13 @@ type Said = Map<string, { margin: number; verdict: Verdict }>;
  *
  * @returns a generator that yields how many points were tried and returns the map
  */
-export function* castMap({ across, up, documentAt, check }: MapInput): Generator<number, CastMap, void> {
+export function* castMap({
+  across,
+  up,
+  documentAt,
+  check,
+  shown,
+}: MapInput): Generator<number, CastMap, void> {
   const sheets: (FitSheet | undefined)[][] = [];
   const placesAt: PlaceSituation[][][] = [];
   let done = 0;
@@ -72,7 +80,8 @@ export function* castMap({ across, up, documentAt, check }: MapInput): Generator
   const answers = people.map(({ placeId }) =>
     sheets.map((row) => row.map((sheet) => saidAt(sheet, placeId))),
   );
-  const moving = movingRules(answers.map((grid) => grid.flat()));
+  const all = movingRules(answers.map((grid) => grid.flat()));
+  const moving = shown ? new Set([...all].filter((ruleId) => shown.has(ruleId))) : all;
   const regions = people.map(({ sitterId, placeId, name }, n): Region => {
     const grid = answers[n] ?? [];
     const rooms = grid.map((row) => row.map((said) => roomOf(said, moving)));

@@ -8,8 +8,8 @@ import {
   type LengthStyle,
 } from '@settlewright/geometry';
 import { verdictWord } from '@/components/verdict.tsx';
+import { firstName, joinWords } from '@/lib/dimension-words.ts';
 import { answerAt, shortBy } from './answers.ts';
-import { joinNames, shortName } from './words.ts';
 
 /** What a choice does, in words. */
 export interface Effects {
@@ -41,8 +41,8 @@ interface Input {
 
 /** Who gains and who loses between two sheets, by name. */
 export function effectsOf({ before, after, ruleIds, ruleBook, style }: Input): Effects {
-  const names = new Map(before.rows.map(({ sitterId, name }) => [sitterId, shortName(name)]));
-  const whoOf = ({ sitterId, marks }: CellChange) => names.get(sitterId ?? '') ?? joinNames(marks);
+  const names = new Map(before.rows.map(({ sitterId, name }) => [sitterId, firstName(name)]));
+  const whoOf = ({ sitterId, marks }: CellChange) => names.get(sitterId ?? '') ?? joinWords(marks);
   const checkOf = ({ ruleId }: CellChange) => ruleBook.rule(ruleId).columnName.toLowerCase();
   const changes = sheetChanges(before, after);
   const alone = ruleIds.size === 1;
@@ -91,7 +91,7 @@ export function lostIn(
   return sheet.rows.flatMap(({ placeId, name }) => {
     const answer = answerAt(sheet, placeId, ruleIds);
     return answer?.outcome.verdict === 'wontFit'
-      ? [`${shortName(name)}, ${shortBy(answer, ruleBook, style)}`]
+      ? [`${firstName(name)}, ${shortBy(answer, ruleBook, style)}`]
       : [];
   });
 }
@@ -106,6 +106,6 @@ function gathered(
   for (const change of changes) groups.set(keyOf(change), [...(groups.get(keyOf(change)) ?? []), change]);
   return [...groups.values()].map((group) => {
     const who = [...new Set(group.map(whoOf))];
-    return { change: group[0] as CellChange, who: joinNames(who), many: who.length > 1 };
+    return { change: group[0] as CellChange, who: joinWords(who), many: who.length > 1 };
   });
 }

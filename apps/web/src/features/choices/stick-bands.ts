@@ -1,6 +1,6 @@
 import type { Practice, RuleBook } from '@settlewright/anthropometry';
 import type { LengthStyle, StoryStick, Stretch } from '@settlewright/geometry';
-import { marksWords, showSize } from './words.ts';
+import { dimensionValue, markWords } from '@/lib/dimension-words.ts';
 
 /** A range that stands over the tape and decides no sitter's verdict. */
 export interface StickBand {
@@ -26,7 +26,7 @@ export function stickBands(
   style: LengthStyle,
 ): StickBand[] {
   const [least = 0, most = 0] = [values[0], values.at(-1)];
-  const show = (value: number) => showSize(value, dimension.unit, style);
+  const show = (value: number) => dimensionValue(value, dimension.unit, style);
   const bands: StickBand[] = [];
   const practice = practiceOf(ruleBook, dimension.id);
   if (practice) {
@@ -40,8 +40,8 @@ export function stickBands(
   for (const { ruleId, clause, marks, inside } of clauses) {
     const ranges = inside.map(({ from, to }) => `${show(from)} to ${show(to)}`).join(' and ');
     bands.push({
-      name: `clause ${clause}, ${marksWords(marks)}`,
-      words: `Inside clause ${clause} for ${marksWords(marks)}: ${ranges || 'nowhere here'} (${ruleBook.rule(ruleId).sourceWord}).`,
+      name: `clause ${clause}, ${markWords(marks)}`,
+      words: `Inside clause ${clause} for ${markWords(marks)}: ${ranges || 'nowhere here'} (${ruleBook.rule(ruleId).sourceWord}).`,
       stretches: inside,
     });
   }

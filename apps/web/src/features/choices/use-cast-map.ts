@@ -26,8 +26,9 @@ export function useCastMap(
   tried: TriedValues,
   secondId: string | undefined,
   crowd: CrowdRequest | undefined,
+  everyCheck: boolean,
 ): MapProgress {
-  const { document, check, style } = useChoices();
+  const { document, check, ruleBook, style } = useChoices();
   const { dimension: first } = tried;
   const { lensHeightMm } = document.asked;
   // From the same set as the first dimension, so that a move along that one changes nothing here.
@@ -36,7 +37,7 @@ export function useCastMap(
     return base && secondId ? dimensionOf(base, secondId) : undefined;
   }, [first, secondId]);
   const stepMm = lengthStep(style);
-  const [found, setFound] = useState<{ second: Dimension; map: CastMap }>();
+  const [found, setFound] = useState<{ second: Dimension; everyCheck: boolean; map: CastMap }>();
   const [counted, setCounted] = useState<{
     key: string;
     map: CastMap;
@@ -54,15 +55,18 @@ export function useCastMap(
       const moved = first.at(x);
       return moved && second.at(y, moved);
     };
-    const steps = castMap({ across, up, documentAt, check });
+    const own = [first.ruleId, second.ruleId].filter((id) => ruleBook.rule(id).scope === 'person');
+    const shown = everyCheck || own.length === 0 ? undefined : new Set(own);
+    const steps = castMap({ across, up, documentAt, check, shown });
     void inSlices(steps, stop.signal, (tries) => setDone(tries / (across.length * up.length))).then((map) => {
-      if (map) setFound({ second, map });
+      if (map) setFound({ second, everyCheck, map });
       setDone(0);
     });
     return () => stop.abort();
-  }, [first, second, stepMm, check]);
+  }, [first, second, stepMm, check, ruleBook, everyCheck]);
 
-  const map = second && found?.second === second ? found.map : undefined;
+  const stands = second !== undefined && found?.second === second && found.everyCheck === everyCheck;
+  const map = stands ? found.map : undefined;
   const key = `${crowd?.populationId} ${crowd?.women} ${lensHeightMm}`;
   useEffect(() => {
     if (!map || !crowd) return undefined;

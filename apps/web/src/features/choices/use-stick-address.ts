@@ -11,9 +11,13 @@ export interface StickAddress {
   rule: string | undefined;
   /** The other dimension of the map. */
   second: string | undefined;
+  /** The map asks every check that either number moves, not only the two numbers' own. */
+  everyCheck: boolean;
   crowd: CrowdChoice;
   /** Changes the address; what is absent or empty goes. */
-  go: (changes: Partial<Record<'d' | 'rule' | 'd2' | 'people' | 'women', string | undefined>>) => void;
+  go: (
+    changes: Partial<Record<'d' | 'rule' | 'd2' | 'map' | 'people' | 'women', string | undefined>>,
+  ) => void;
 }
 
 /** A population that ships, or the number of one of the workshop's own. */
@@ -30,6 +34,7 @@ export function useStickAddress(): StickAddress {
       dimensionId: params.get('d') ?? undefined,
       rule: params.get('rule') ?? undefined,
       second: params.get('d2') ?? undefined,
+      everyCheck: params.get('map') === EVERY_CHECK,
       crowd: {
         populationId: isCrowd(people) ? people : DEFAULT_CROWD.populationId,
         women: women >= 0 && women <= 100 ? Math.round(women) : DEFAULT_CROWD.women,

@@ -1,11 +1,11 @@
 import type { StickRow, StoryStick } from '@settlewright/geometry';
 import { useCallback, useMemo, useState } from 'react';
+import { exactValue } from '@/lib/dimension-words.ts';
 import { answerAt, type Answer } from './answers.ts';
 import { useChoices } from './choices-view.ts';
 import { bestValue, orderedRows } from './suggestion.ts';
 import type { TriedValues } from './tried-values.ts';
 import { EVERY_CHECK } from './use-stick-address.ts';
-import { showValue } from './words.ts';
 
 export interface StickValues {
   rows: StickRow[];
@@ -60,7 +60,7 @@ export function useStickValues(tried: TriedValues, stick: StoryStick, rule: stri
       setTrial(undefined);
       const set = dimension.at(shown);
       if (!replace || !set || Math.abs(shown - present) < 1e-6) return;
-      const show = (value: number) => showValue(value, dimension.unit, style);
+      const show = (value: number) => exactValue(value, dimension.unit, style);
       replace(set, `${dimension.label} ${show(present)} to ${show(shown)}`);
     },
     leave: () => setTrial(undefined),

@@ -1,9 +1,9 @@
 import type { Dimension } from '@settlewright/geometry';
 import { Button } from '@/components/button.tsx';
 import { Measure } from '@/components/measure.tsx';
+import { aboutInHundred, exactValue, firstName, joinWords } from '@/lib/dimension-words.ts';
 import type { BestPair, CastMap } from '../cast-map.ts';
 import { useChoices } from '../choices-view.ts';
-import { inHundred, joinNames, shortName, showValue } from '../words.ts';
 
 interface BestPairsProps {
   pairs: readonly BestPair[];
@@ -40,8 +40,8 @@ export function BestPairs({ pairs, map, first, second, onTake }: BestPairsProps)
         <tbody>
           {pairs.map((pair) => {
             const [a, b] = [
-              showValue(pair.across, first.unit, style),
-              showValue(pair.up, second.unit, style),
+              exactValue(pair.across, first.unit, style),
+              exactValue(pair.up, second.unit, style),
             ];
             const [lost, unknown] = [namesAt(map, pair, 'lost'), namesAt(map, pair, 'notKnown')];
             return (
@@ -54,11 +54,11 @@ export function BestPairs({ pairs, map, first, second, onTake }: BestPairsProps)
                 </td>
                 <td className={CELL}>
                   {pair.served === people ? `all ${people} served` : `${pair.served} of ${people} served`}
-                  {lost.length > 0 && `; ${joinNames(lost)} won’t fit`}
-                  {unknown.length > 0 && `; ${joinNames(unknown)} not known`}
+                  {lost.length > 0 && `; ${joinWords(lost)} won’t fit`}
+                  {unknown.length > 0 && `; ${joinWords(unknown)} not known`}
                 </td>
                 <td className={CELL}>
-                  {pair.share === undefined ? 'not counted yet' : `about ${inHundred(pair.share)}`}
+                  {pair.share === undefined ? 'not counted yet' : aboutInHundred(pair.share)}
                 </td>
                 {onTake && (
                   <td className={CELL}>
@@ -81,5 +81,5 @@ export function BestPairs({ pairs, map, first, second, onTake }: BestPairsProps)
 
 function namesAt({ across, up, regions }: CastMap, pair: BestPair, state: 'lost' | 'notKnown'): string[] {
   const [i, j] = [up.indexOf(pair.up), across.indexOf(pair.across)];
-  return regions.filter(({ states }) => states[i]?.[j] === state).map(({ name }) => shortName(name));
+  return regions.filter(({ states }) => states[i]?.[j] === state).map(({ name }) => firstName(name));
 }

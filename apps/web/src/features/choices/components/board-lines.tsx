@@ -1,10 +1,11 @@
 import type { StickRow } from '@settlewright/geometry';
 import type { ReactNode } from 'react';
+import { exactValue } from '@/lib/dimension-words.ts';
 import type { Answer } from '../answers.ts';
 import type { BoardLayout } from '../board-layout.ts';
 import { useChoices } from '../choices-view.ts';
 import { shareAt, type ShareCurves } from '../use-share-curve.ts';
-import { inHundred, showValue } from '../words.ts';
+import { inHundred } from '../words.ts';
 import { lathY } from './board-ground.tsx';
 import { shareY } from './share-curve.tsx';
 import { SvgWords } from './svg-words.tsx';
@@ -70,7 +71,7 @@ export function BoardLines({ layout, unit, rows, answers, shown, settled, sugges
             />
           )}
           <LineWords x={x(wanted)} before={left} layout={layout} colour="var(--color-chalk)">
-            <SvgWords text={`${showValue(wanted, unit, style)}${counted(wantedShare)}`} />
+            <SvgWords text={`${exactValue(wanted, unit, style)}${counted(wantedShare)}`} />
           </LineWords>
         </>
       )}
@@ -92,7 +93,7 @@ export function BoardLines({ layout, unit, rows, answers, shown, settled, sugges
         strokeWidth={1.4}
       />
       <LineWords x={at} before={!left} layout={layout} colour="var(--color-ink)">
-        <SvgWords text={`${showValue(shown, unit, style)}${settled ? ' now' : ''}${counted(share)}`} />
+        <SvgWords text={`${exactValue(shown, unit, style)}${settled ? ' now' : ''}${counted(share)}`} />
       </LineWords>
     </g>
   );

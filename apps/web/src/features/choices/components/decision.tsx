@@ -2,11 +2,12 @@ import { type StoryStick, type Dimension } from '@settlewright/geometry';
 import { memo, useMemo } from 'react';
 import { Measure } from '@/components/measure.tsx';
 import { useSession } from '@/lib/session.ts';
+import { exactValue, joinWords, markWords } from '@/lib/dimension-words.ts';
 import { useChoices } from '../choices-view.ts';
 import { effectsOf, lostIn } from '../effects.ts';
 import type { TriedValues } from '../tried-values.ts';
 import { shareAt, type ShareCurves } from '../use-share-curve.ts';
-import { joinNames, marksWords, movingWords, showValue } from '../words.ts';
+import { movingWords } from '../words.ts';
 import { KeepChoice } from './keep-choice.tsx';
 import { TakeChoice } from './take-choice.tsx';
 
@@ -33,7 +34,7 @@ function publicWords(from: number | undefined, to: number | undefined, than = ''
 const alongWords = ({ tableMarks }: Dimension): string =>
   tableMarks.length === 0
     ? ''
-    : `${tableMarks.length === 1 ? 'table' : 'tables'} ${marksWords(tableMarks)} along with it`;
+    : `${tableMarks.length === 1 ? 'table' : 'tables'} ${markWords(tableMarks)} along with it`;
 
 /** The choice in plain words: take the suggestion, or keep what is and say so. */
 export const Decision = memo(function Decision({
@@ -47,7 +48,7 @@ export const Decision = memo(function Decision({
   const { document, check, replace, ruleBook, style } = useChoices();
   const by = useSession((state) => state.user?.name);
   const { dimension } = tried;
-  const show = (value: number) => showValue(value, dimension.unit, style);
+  const show = (value: number) => exactValue(value, dimension.unit, style);
   const now = show(present);
   const next = suggested === undefined ? undefined : dimension.at(suggested);
   const effects = useMemo(
@@ -61,7 +62,7 @@ export const Decision = memo(function Decision({
   const share = (value: number) => curves && shareAt(curves.points, value);
   const served = suggested === undefined ? undefined : share(suggested);
   const losing =
-    lost.length === 0 ? '' : `; ${joinNames(lost.map((line) => line.replace(/, .*$/, '')))} won’t fit`;
+    lost.length === 0 ? '' : `; ${joinWords(lost.map((line) => line.replace(/, .*$/, '')))} won’t fit`;
   const difference = `${dimension.label} kept at ${now} (${movingWords(dimension)})${losing}.`;
   const keep = (reason: string) => {
     const note = {

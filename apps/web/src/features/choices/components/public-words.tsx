@@ -3,9 +3,9 @@ import { memo } from 'react';
 import { Disclosure } from '@/components/disclosure.tsx';
 import { LoadingLine } from '@/components/loading.tsx';
 import { Measure } from '@/components/measure.tsx';
+import { aboutInHundred, exactValue } from '@/lib/dimension-words.ts';
 import { useChoices } from '../choices-view.ts';
 import { shareAt, type ShareCurves } from '../use-share-curve.ts';
-import { inHundred, showValue } from '../words.ts';
 
 interface PublicWordsProps {
   curves: ShareCurves | undefined;
@@ -18,7 +18,7 @@ interface PublicWordsProps {
   wear: string;
 }
 
-const told = (share: number | undefined) => (share === undefined ? 'not known' : `about ${inHundred(share)}`);
+const told = (share: number | undefined) => (share === undefined ? 'not known' : aboutInHundred(share));
 
 /** The share of the public in words: by the shown checks, and by every check at once. */
 export const PublicWords = memo(function PublicWords({
@@ -49,7 +49,7 @@ export const PublicWords = memo(function PublicWords({
         {values.map((value) => (
           <div key={value} className="tablet:col-span-3 tablet:grid tablet:grid-cols-subgrid">
             <dt className="text-ink-3">
-              at <Measure text={showValue(value, unit, style)} />
+              at <Measure text={exactValue(value, unit, style)} />
             </dt>
             <dd>{told(shareAt(points, value))} by the checks shown</dd>
             <dd className="text-ink-2">
@@ -61,8 +61,8 @@ export const PublicWords = memo(function PublicWords({
       <p className="mt-1 max-w-text text-ink-2">
         {rejection && (
           <>
-            As it stands, {ruleBook.rule(rejection.ruleId).columnName.toLowerCase()} turns most away, about{' '}
-            {inHundred(rejection.lost)}.{' '}
+            As it stands, {ruleBook.rule(rejection.ruleId).columnName.toLowerCase()} turns most away,{' '}
+            {aboutInHundred(rejection.lost)}.{' '}
           </>
         )}
         All else is held as it is drawn. Ten thousand people are drawn from the survey’s statistics, so a

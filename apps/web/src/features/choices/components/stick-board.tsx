@@ -1,11 +1,11 @@
 import type { StickRow, StoryStick } from '@settlewright/geometry';
 import type { Ref } from 'react';
+import { exactValue } from '@/lib/dimension-words.ts';
 import type { Answer } from '../answers.ts';
 import type { BoardLayout } from '../board-layout.ts';
 import { useChoices } from '../choices-view.ts';
 import type { StickBand } from '../stick-bands.ts';
 import type { ShareCurves } from '../use-share-curve.ts';
-import { showValue } from '../words.ts';
 import { BoardGround, BoardNames } from './board-ground.tsx';
 import { BoardLines } from './board-lines.tsx';
 import { BoardVerdicts } from './board-verdicts.tsx';
@@ -84,13 +84,13 @@ export function StickBoard({
       ) : (
         <>
           <text x={nowX} y={rowsTop - 6} fontSize={13} fontWeight={600} fill="var(--color-ink)">
-            at <SvgWords text={showValue(shown, unit, style)} />
+            at <SvgWords text={exactValue(shown, unit, style)} />
           </text>
           <BoardVerdicts layout={layout} x={nowX} answers={answers} />
           {suggested !== undefined && (
             <>
               <text x={thenX} y={rowsTop - 6} fontSize={13} fontWeight={600} fill="var(--color-chalk)">
-                at <SvgWords text={showValue(suggested, unit, style)} />
+                at <SvgWords text={exactValue(suggested, unit, style)} />
               </text>
               <BoardVerdicts layout={layout} x={thenX} answers={suggestedAnswers} />
             </>

@@ -3,6 +3,7 @@ import { useMemo, useRef } from 'react';
 import { Notice } from '@/components/notice.tsx';
 import { CROWD_WEAR, crowdWords, type CrowdChoice } from '@/lib/crowd/crowds.ts';
 import { useWidth } from '@/lib/use-width.ts';
+import { aboutInHundred, dimensionValue } from '@/lib/dimension-words.ts';
 import { boardLayout } from '../board-layout.ts';
 import { useChoices } from '../choices-view.ts';
 import { commonWords, countsWords } from '../common-words.ts';
@@ -12,7 +13,7 @@ import type { AskedCrowd } from '../use-crowd.ts';
 import { shareAt, useShareCurves } from '../use-share-curve.ts';
 import { useRejection } from '../use-rejection.ts';
 import { useStickValues } from '../use-stick-values.ts';
-import { inHundred, sayValue, showSize } from '../words.ts';
+import { sayValue } from '../words.ts';
 import { CrowdChooser } from './crowd-chooser.tsx';
 import { Decision } from './decision.tsx';
 import { PlumbSlider } from './plumb-slider.tsx';
@@ -69,7 +70,7 @@ export function StickDesk({ tried, stick, rule, crowd, asked, onCrowd }: StickDe
   const words = [
     sayValue(shown, unit, style),
     countsWords(answers.map((answer) => answer?.outcome.verdict)),
-    ...(share === undefined ? [] : [`about ${inHundred(share)}`]),
+    ...(share === undefined ? [] : [aboutInHundred(share)]),
   ].join('; ');
   const common = useMemo(
     () => commonWords(stick, { present, step: tried.step, style }),
@@ -129,7 +130,7 @@ export function StickDesk({ tried, stick, rule, crowd, asked, onCrowd }: StickDe
           suggested={suggested}
           unit={unit}
           whole={whole}
-          wear={`shoes of ${showSize(CROWD_WEAR.shoeMm, 'mm', style)}, ${CROWD_WEAR.clothing} clothes`}
+          wear={`shoes of ${dimensionValue(CROWD_WEAR.shoeMm, 'mm', style)}, ${CROWD_WEAR.clothing} clothes`}
         />
         <div className="mt-4 max-w-text">
           <CrowdChooser crowd={crowd} options={asked.options} onChange={onCrowd} />

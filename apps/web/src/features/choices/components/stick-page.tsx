@@ -7,11 +7,12 @@ import { LoadingLine } from '@/components/loading.tsx';
 import { Measure } from '@/components/measure.tsx';
 import { Notice } from '@/components/notice.tsx';
 import { PageHeading } from '@/components/page-heading.tsx';
+import { exactValue } from '@/lib/dimension-words.ts';
 import { useChoices } from '../choices-view.ts';
 import { useCrowd } from '../use-crowd.ts';
 import { useStick, useTriedValues } from '../use-stick.ts';
 import { EVERY_CHECK, useStickAddress } from '../use-stick-address.ts';
-import { dimensionWords, movingWords, showValue } from '../words.ts';
+import { dimensionWords, movingWords } from '../words.ts';
 import { RuleChooser } from './rule-chooser.tsx';
 import { StickDesk } from './stick-desk.tsx';
 import { TwoDimensions } from './two-dimensions.tsx';
@@ -114,7 +115,7 @@ function Stick(links: StickPageProps) {
         {tried && (
           <p className="text-sm text-ink-2">
             + room left, − short · left and right keys move the plumb line by{' '}
-            <Measure text={showValue(tried.step, tried.dimension.unit, style)} />
+            <Measure text={exactValue(tried.step, tried.dimension.unit, style)} />
           </p>
         )}
       </div>
@@ -141,7 +142,9 @@ function Stick(links: StickPageProps) {
             second={address.second}
             crowd={address.crowd}
             asked={asked}
+            everyCheck={address.everyCheck}
             onSecond={(id) => address.go({ d2: id })}
+            onEveryCheck={(on) => address.go({ map: on ? EVERY_CHECK : undefined })}
           />
         </>
       )}

@@ -2,9 +2,9 @@ import type { StickRow } from '@settlewright/geometry';
 import { memo } from 'react';
 import { Disclosure } from '@/components/disclosure.tsx';
 import { Measure } from '@/components/measure.tsx';
+import { dimensionValue, exactValue } from '@/lib/dimension-words.ts';
 import { answerWords, type Answer } from '../answers.ts';
 import { useChoices } from '../choices-view.ts';
-import { showSize, showValue } from '../words.ts';
 
 interface StickTableProps {
   caption: string;
@@ -30,7 +30,7 @@ export const StickTable = memo(function StickTable({
 }: StickTableProps) {
   const { ruleBook, style } = useChoices();
   const end = (value: number | undefined) =>
-    value === undefined ? 'nowhere here' : <Measure text={showSize(value, unit, style)} />;
+    value === undefined ? 'nowhere here' : <Measure text={dimensionValue(value, unit, style)} />;
   const said = (answer: Answer | undefined) => answerWords(answer, ruleBook, style);
   return (
     <Disclosure words="The same as a table">
@@ -39,14 +39,14 @@ export const StickTable = memo(function StickTable({
           <caption className="sr-only">{caption}</caption>
           <thead className="text-xs text-ink-3">
             <tr>
-              {['Sitter', 'Lowest', 'Highest', `At ${showValue(present, unit, style)}`].map((head) => (
+              {['Sitter', 'Lowest', 'Highest', `At ${exactValue(present, unit, style)}`].map((head) => (
                 <th key={head} scope="col" className={`${CELL} font-medium`}>
                   <Measure text={head} />
                 </th>
               ))}
               {suggested !== undefined && (
                 <th scope="col" className={`${CELL} font-medium`}>
-                  <Measure text={`At ${showValue(suggested, unit, style)}`} />
+                  <Measure text={`At ${exactValue(suggested, unit, style)}`} />
                 </th>
               )}
             </tr>

@@ -3,15 +3,17 @@ import { useMemo } from 'react';
 import { Combobox } from '@/components/combobox.tsx';
 import { LoadingLine } from '@/components/loading.tsx';
 import { Notice } from '@/components/notice.tsx';
+import { Select } from '@/components/select.tsx';
 import { RuleHeading } from '@/components/rule-heading.tsx';
 import { crowdWords, type CrowdChoice } from '@/lib/crowd/crowds.ts';
 import { useWidth } from '@/lib/use-width.ts';
+import { exactValue, firstName } from '@/lib/dimension-words.ts';
 import { bestPairs, type BestPair, type CastMap } from '../cast-map.ts';
 import { useChoices } from '../choices-view.ts';
 import type { TriedValues } from '../tried-values.ts';
 import type { AskedCrowd } from '../use-crowd.ts';
 import { useCastMap } from '../use-cast-map.ts';
-import { dimensionWords, shortName, showValue } from '../words.ts';
+import { dimensionWords } from '../words.ts';
 import { BestPairs } from './best-pairs.tsx';
 import { MapDrawing } from './map-drawing.tsx';
 
@@ -22,9 +24,15 @@ interface TwoDimensionsProps {
   crowd: CrowdChoice;
   asked: AskedCrowd;
   onSecond: (id: string | undefined) => void;
+  everyCheck: boolean;
+  onEveryCheck: (on: boolean) => void;
 }
 
 const WIDTH = 720;
+const CHECKS = [
+  { value: 'own', words: 'the two numbers’ own' },
+  { value: 'every', words: 'every check that either moves' },
+] as const;
 
 /** The dimension against another one: where everybody is served, and how many of the public. */
 export function TwoDimensions({
@@ -34,6 +42,8 @@ export function TwoDimensions({
   crowd,
   asked,
   onSecond,
+  everyCheck,
+  onEveryCheck,
 }: TwoDimensionsProps) {
   const { document, replace, style } = useChoices();
   const [measure, width = WIDTH] = useWidth();
@@ -42,6 +52,7 @@ export function TwoDimensions({
     tried,
     secondId === first.id ? undefined : secondId,
     asked.request,
+    everyCheck,
   );
   const now = tried.valueOf(document) ?? first.value;
   const present = useMemo(
@@ -54,7 +65,7 @@ export function TwoDimensions({
     const set = moved && second?.at(up, moved);
     if (!set || !second || !replace) return;
     const step = (one: Dimension, from: number, to: number) =>
-      `${one.label} ${showValue(from, one.unit, style)} to ${showValue(to, one.unit, style)}`;
+      `${one.label} ${exactValue(from, one.unit, style)} to ${exactValue(to, one.unit, style)}`;
     replace(set, `${step(first, now, across)}, ${step(second, present.up, up)}`);
   };
   return (
@@ -70,10 +81,17 @@ export function TwoDimensions({
             .map((one) => ({ id: one.id, words: dimensionWords(one) }))}
           onChange={(id) => onSecond(id ?? undefined)}
         />
+        {second && (
+          <Select
+            label="Checks"
+            value={everyCheck ? 'every' : 'own'}
+            options={CHECKS}
+            onChange={(which) => onEveryCheck(which === 'every')}
+          />
+        )}
         <p className="text-sm text-ink-2">
-          Each outline is where that sitter is at least tight by every check that either number moves. The
-          darker the ground, the more of {crowdWords(crowd, asked.options)} fit all of those checks at once;
-          dotted lines at 25, 50 and 75 in 100.
+          Each outline is where that sitter is at least tight by these checks. The darker the ground, the more
+          of {crowdWords(crowd, asked.options)} fit all of them at once; dotted lines at 25, 50 and 75 in 100.
         </p>
       </div>
       {fault && (
@@ -110,12 +128,12 @@ function MapWords({ map: { regions, ruleIds } }: { map: CastMap }) {
   const checks = [...new Set(ruleIds.map(check))].join(', ');
   return (
     <div className="mt-2 grid gap-1 text-sm text-ink-2">
-      <p>Checks that either number moves: {checks}.</p>
+      <p>Checks: {checks}.</p>
       {regions.map(
         ({ placeId, name, blockedBy }) =>
           blockedBy && (
             <p key={placeId} className="text-wont">
-              {shortName(name)} fits nowhere here: even at best {check(blockedBy)} won’t do.
+              {firstName(name)} fits nowhere here: even at best {check(blockedBy)} won’t do.
             </p>
           ),
       )}
