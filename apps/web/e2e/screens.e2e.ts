@@ -114,6 +114,7 @@ describe('every screen', () => {
       [`${at.production}/people`, 'People'],
       [at.order, /cushions/i],
       [`${at.room}/fit`, 'Fit sheet'],
+      [`${at.room}/stick?d=seat-height`, 'Seat height, pressed'],
       [`${at.room}/revisions`, 'Revisions of Dining car'],
       ['/nowhere', 'Nobody sits here'],
       ['/w/00000000-0000-4000-8000-000000000000', 'Nobody sits here'],
@@ -156,6 +157,15 @@ describe('every screen', () => {
     await drawer(page).getByText('Why.').waitFor();
     await expectAccessible(page);
     await toggleFit(page);
+  });
+
+  it('the story stick with its plumb line, the people behind a share, and a map', async () => {
+    await page.goto(`${at.room}/stick?d=seat-height&d2=seat-depth`);
+    await page.getByRole('slider', { name: 'Seat height, pressed' }).waitFor();
+    await page.getByRole('button', { name: 'Who these people are' }).click();
+    await page.getByRole('button', { name: 'The same as a table' }).click();
+    await page.getByRole('region', { name: 'Best pairs of values' }).waitFor({ timeout: 60_000 });
+    await expectAccessible(page);
   });
 
   it.each(['A', 'B', 'C', 'D', 'E'])('view %s is drawn within its means', async (letter) => {
@@ -219,6 +229,7 @@ describe('every screen', () => {
       [`${at.workshop}/workshop`, 'Ropewalk Scenic'],
       [at.order, /cushions/i],
       [`${at.room}/fit`, 'Fit sheet'],
+      [`${at.room}/stick?d=seat-height`, 'Seat height, pressed'],
       [`${at.room}/revisions`, 'Revisions of Dining car'],
       ['/account', /./],
     ] as const) {
