@@ -7,7 +7,7 @@ import { TextArea } from '@/components/text-field.tsx';
 import type { ImportPreview } from '@/lib/contract.ts';
 import { sayProblem } from '@/lib/problem.ts';
 import { type CastPlace, useImport, usePreviewImport } from '../api.ts';
-import { LARGEST_CSV_BYTES, readTextFile } from '../read-file.ts';
+import { LARGEST_CSV_BYTES, readTextFile } from '@/lib/read-text-file.ts';
 import { ImportPreviewTable } from './import-preview-table.tsx';
 
 const EXAMPLE = `name,part,height,weight kg,shoe in

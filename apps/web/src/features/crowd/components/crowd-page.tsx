@@ -9,7 +9,9 @@ import { announce } from '@/lib/announce.ts';
 import { CROWDS, crowdWords, DEFAULT_CROWD, type CrowdChoice } from '@/lib/crowd/crowds.ts';
 import { useOwnCrowd, useOwnCrowds } from '@/lib/crowd/own-crowds.ts';
 import { usePageTitle } from '@/lib/page-title.ts';
+import { useWorkshop } from '@/lib/workshop.ts';
 import { useCrowdView } from '../crowd-view.ts';
+import { AddSurvey } from '../survey/add-survey.tsx';
 import { useShares, type Shares } from '../use-shares.ts';
 import { ofHundred, rejectionWords } from '../words.ts';
 import { AllAtOnce } from './all-at-once.tsx';
@@ -71,6 +73,7 @@ function useCrowdAddress(): [CrowdChoice, (crowd: CrowdChoice) => void] {
 
 function Counted() {
   const { ruleBook } = useCrowdView();
+  const { canEdit } = useWorkshop();
   const [crowd, choose] = useCrowdAddress();
   const [unticked, setUnticked] = useState<ReadonlySet<string>>(new Set());
   const own = useOwnCrowds();
@@ -92,6 +95,7 @@ function Counted() {
     <>
       <div className="mb-8 max-w-text">
         <PopulationFields crowd={crowd} own={own} onChange={choose} />
+        {canEdit && <AddSurvey onAdded={(populationId) => choose({ ...crowd, populationId })} />}
       </div>
       {fault !== undefined && (
         <Notice tone="wont" title="The people could not be counted">
