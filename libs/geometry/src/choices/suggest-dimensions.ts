@@ -35,7 +35,7 @@ export interface Suggestion {
   blame?: Blame;
 }
 
-const MOST = 600;
+const MOST = 400;
 /** Choices strewn over the whole range before the best are refined. */
 const STREWN = 24;
 /** Best choices that are refined, far enough from each other. */
