@@ -8,7 +8,9 @@ const SWAY_PX = 90;
 
 /** Moves the bob to and fro with the mouse, one move a frame, and answers the mean time in script of a move. */
 async function scriptTime(page, devtools) {
-  const box = await page.locator('[data-stick-bob]').boundingBox();
+  const bob = page.locator('[data-stick-bob]');
+  const stood = Number(await bob.getAttribute('aria-valuenow'));
+  const box = await bob.boundingBox();
   const [x, y] = [box.x + box.width / 2, box.y + box.height / 2];
   const inScript = async () => {
     const { metrics } = await devtools.send('Performance.getMetrics');
@@ -18,11 +20,13 @@ async function scriptTime(page, devtools) {
   await page.mouse.down();
   const before = await inScript();
   for (let n = 1; n <= MOVES; n += 1) {
-    await page.mouse.move(x + SWAY_PX * Math.sin((n / MOVES) * 4 * Math.PI), y);
+    await page.mouse.move(x + SWAY_PX * Math.sin((n / MOVES) * 4.5 * Math.PI), y);
     await page.evaluate(() => new Promise((resolve) => globalThis.requestAnimationFrame(resolve)));
   }
   const after = await inScript();
+  const held = Number(await bob.getAttribute('aria-valuenow'));
   await page.mouse.up();
+  if (Math.abs(held - stood) < 1) throw new Error('The plumb line did not follow the mouse.');
   return (after - before) / MOVES;
 }
 
@@ -43,7 +47,7 @@ export async function run() {
     executablePath: '/usr/bin/chromium',
     args: ['--no-sandbox', '--disable-background-networking', '--disable-quic'],
   });
-  const page = await browser.newPage({ baseURL: product.address, viewport: { width: 1440, height: 900 } });
+  const page = await browser.newPage({ baseURL: product.address, viewport: { width: 1440, height: 1400 } });
   await page.goto('/sign-in');
   await page.getByLabel('E-mail').fill(product.email);
   await page.getByLabel('Password', { exact: true }).fill(product.password);
