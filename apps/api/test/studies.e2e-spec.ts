@@ -306,6 +306,26 @@ describe('a worker', () => {
   });
 });
 
+describe('how those who do not fit differ from the rest', () => {
+  it('is told in measures to owner and designer only', async () => {
+    const { id } = await start({ people: 300 });
+    for (const role of ['designer', 'carpenter', 'reviewer'] as const) {
+      const member = await createMember(test, place.workshop.id, role);
+      const { body } = await as(test, member).get(`${studies()}/${id}`).expect(200);
+      const list = (await as(test, member).get(studies()).expect(200)).text;
+      const lost = body.result.checks.flatMap((check: { lost?: object }) => check.lost ?? []);
+      expect(lost.length).toBeGreaterThan(0);
+      const keys = ['share', 'women', 'words', ...(role === 'designer' ? ['traits'] : [])].sort();
+      for (const one of lost) expect([role, Object.keys(one).sort()]).toEqual([role, keys]);
+      if (role === 'designer') continue;
+      for (const word of ['traits', 'lostMean', 'restMean']) {
+        expect(`${JSON.stringify(body)} ${list}`).not.toContain(word);
+      }
+    }
+    await as(test, owner).delete(`${studies()}/${id}`).expect(204);
+  });
+});
+
 describe('what is kept', () => {
   it('is listed newest first, read by everybody, and removed', async () => {
     const reviewer = await createMember(test, place.workshop.id, 'reviewer');

@@ -12,7 +12,10 @@ import { StartStudyDto } from './dto/start-study.dto';
 import { ListedStudyDto, StudyDto, StudyListDto } from './dto/study.dto';
 import { StudiesService } from './studies.service';
 
-/** What share of a population a set fits. Shares say nothing of any one person, so every member reads them. */
+/**
+ * What share of a population a set fits. Shares say nothing of any one person, so every member reads them; the means
+ * of body measures beside them are for owner and designer only.
+ */
 @ApiTags('studies')
 @Controller('workshops/:workshopId/productions/:productionId/sets/:setId/studies')
 export class StudiesController {
@@ -41,7 +44,7 @@ export class StudiesController {
     @IdParam('setId') setId: string,
     @Body() body: StartStudyDto,
   ): Promise<StudyDto> {
-    return StudyDto.of(await this.studies.start(member, productionId, setId, body));
+    return StudyDto.for(member, await this.studies.start(member, productionId, setId, body));
   }
 
   @Get(':studyId')
@@ -53,7 +56,7 @@ export class StudiesController {
     @IdParam('setId') setId: string,
     @IdParam('studyId') studyId: string,
   ): Promise<StudyDto> {
-    return StudyDto.of(await this.studies.find(member, productionId, setId, studyId));
+    return StudyDto.for(member, await this.studies.find(member, productionId, setId, studyId));
   }
 
   @Post(':studyId/cancel')
@@ -67,7 +70,7 @@ export class StudiesController {
     @IdParam('setId') setId: string,
     @IdParam('studyId') studyId: string,
   ): Promise<StudyDto> {
-    return StudyDto.of(await this.studies.cancel(member, productionId, setId, studyId));
+    return StudyDto.for(member, await this.studies.cancel(member, productionId, setId, studyId));
   }
 
   @Delete(':studyId')

@@ -1,5 +1,7 @@
 import type { PopulationKind, ShareOutcome } from '@settlewright/anthropometry';
 import { ApiProperty, ApiPropertyOptional } from '@nestjs/swagger';
+import { seesMeasures } from '../../cast/sees-measures';
+import type { MemberInfo } from '../../common/access.decorator';
 import { PersonDto } from '../../sets/dto/person.dto';
 import { STUDY_STATES, type Study, type StudyState } from '../entities/study.entity';
 import type { StudyResult } from '../study-question';
@@ -97,11 +99,33 @@ export class StudyDto extends ListedStudyDto {
     additionalProperties: true,
     description: 'StudyShares of the anthropometry library; when done',
   })
-  result?: StudyResult;
+  result?: StudyResult | ResultWithoutTraits;
 
-  static override of(study: Study): StudyDto {
-    return { ...ListedStudyDto.of(study), ...(study.result ? { result: study.result } : {}) };
+  static for(member: MemberInfo, study: Study): StudyDto {
+    const { result } = study;
+    if (!result) return ListedStudyDto.of(study);
+    return {
+      ...ListedStudyDto.of(study),
+      result: seesMeasures(member) ? result : withoutTraits(result),
+    };
   }
+}
+
+type Check = StudyResult['checks'][number];
+type ResultWithoutTraits = Omit<StudyResult, 'checks'> & {
+  checks: (Omit<Check, 'lost'> & { lost?: Omit<NonNullable<Check['lost']>, 'traits'> })[];
+};
+
+/** The shares stay; the body measures of those who do not fit, and of the rest, go. */
+function withoutTraits(result: StudyResult): ResultWithoutTraits {
+  return {
+    ...result,
+    checks: result.checks.map(({ lost, ...check }) => {
+      if (!lost) return check;
+      const { share, women, words } = lost;
+      return { ...check, lost: { share, women, words } };
+    }),
+  };
 }
 
 export class StudyListDto {
