@@ -64,6 +64,7 @@ export class CastService {
           statureMm: dto.statureMm ?? null,
           statureSource: dto.statureSource ?? 'told',
           weightKg: dto.weightKg ?? null,
+          age: dto.age ?? null,
           measured,
           shoeMm: dto.shoeMm ?? SHOE_MM,
           clothing: dto.clothing ?? 'light',
@@ -94,6 +95,7 @@ export class CastService {
       if (dto.statureMm !== undefined) person.statureMm = dto.statureMm;
       person.statureSource = dto.statureSource ?? person.statureSource;
       if (dto.weightKg !== undefined) person.weightKg = dto.weightKg;
+      if (dto.age !== undefined) person.age = dto.age;
       person.measured = measured ?? person.measured;
       person.shoeMm = dto.shoeMm ?? person.shoeMm;
       person.clothing = dto.clothing ?? person.clothing;
@@ -126,8 +128,10 @@ export class CastService {
         if (!value) return [];
         const colour = nextColour(worn);
         worn.push(colour);
-        const { statureMm = null, weightKg = null, shoeMm = SHOE_MM } = value;
-        return [manager.create(CastMember, { ...value, productionId, statureMm, weightKg, shoeMm, colour })];
+        const { statureMm = null, weightKg = null, age = null, shoeMm = SHOE_MM } = value;
+        return [
+          manager.create(CastMember, { ...value, productionId, statureMm, weightKg, age, shoeMm, colour }),
+        ];
       });
       await manager.save(people, { chunk: 200 });
       await this.audit.record(manager, {
@@ -194,6 +198,7 @@ export class CastService {
         statureMm: null,
         statureSource: 'told',
         weightKg: null,
+        age: null,
         measured: {},
         shoeMm: SHOE_MM,
         clothing: 'light',

@@ -19,6 +19,7 @@ export function castPerson(member: CastMember): CastPerson {
         ? {}
         : { stature: { mm: member.statureMm, source: member.statureSource } }),
       ...(member.weightKg === null ? {} : { weightKg: member.weightKg }),
+      ...(member.age === null ? {} : { age: member.age }),
       measured: Object.fromEntries(taken),
       shoeMm: member.shoeMm,
       clothing: member.clothing,

@@ -8,11 +8,13 @@ export interface Limit {
   label: string;
   min: number;
   max: number;
-  unit: 'mm' | 'kg';
+  unit: 'mm' | 'kg' | 'years';
 }
 
 export const STATURE_LIMIT: Limit = { label: 'Stature', min: 1000, max: 2300, unit: 'mm' };
 export const WEIGHT_LIMIT: Limit = { label: 'Weight', min: 25, max: 300, unit: 'kg' };
+/** From the youngest whom adults' body data describe. */
+export const AGE_LIMIT: Limit = { label: 'Age', min: 16, max: 110, unit: 'years' };
 export const SHOE_LIMIT: Limit = { label: 'Shoe height', min: 0, max: 150, unit: 'mm' };
 
 export const TAPE_LIMITS: Record<TapeMeasureKey, Limit> = {

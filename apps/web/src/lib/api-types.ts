@@ -1477,6 +1477,7 @@ export interface components {
             /** @enum {string} */
             statureSource: "measured" | "told";
             weightKg?: number;
+            age?: number;
             measured: {
                 sitting_height?: {
                     mm: number;
@@ -1596,6 +1597,8 @@ export interface components {
              */
             statureSource: "measured" | "told";
             weightKg?: number | null;
+            /** @description whole years */
+            age?: number | null;
             /** @description all that was taken with a tape; replaces what was there */
             measured?: {
                 sitting_height?: {
@@ -1709,6 +1712,7 @@ export interface components {
             /** @enum {string} */
             statureSource: "measured" | "told";
             weightKg?: number;
+            age?: number;
             measured: {
                 sitting_height?: {
                     mm: number;
@@ -1836,6 +1840,8 @@ export interface components {
              */
             statureSource: "measured" | "told";
             weightKg?: number | null;
+            /** @description whole years */
+            age?: number | null;
             /** @description all that was taken with a tape; replaces what was there */
             measured?: {
                 sitting_height?: {

@@ -8,6 +8,8 @@ interface Limit {
 /** What a field takes. Wide on purpose: it catches a wrong unit or a slipped digit, not an unusual body. */
 export const STATURE_MM: Limit = { min: 1000, max: 2300 };
 export const WEIGHT_KG: Limit = { min: 25, max: 300 };
+/** From the youngest whom adults' body data describe; whole years. */
+export const AGE_YEARS: Limit = { min: 16, max: 110 };
 export const SHOE_MM: Limit = { min: 0, max: 150 };
 
 export const TAPE_MM: Record<TapeMeasureKey, Limit> = {

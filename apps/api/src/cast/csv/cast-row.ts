@@ -4,6 +4,7 @@ import { DAY_WORDS, isPastDay } from '../day';
 import type { StatureSource, TapeMeasures } from '../entities/cast-member.entity';
 import {
   acceptedWords,
+  AGE_LIMIT,
   type Limit,
   NAME_MAX,
   NOTES_MAX,
@@ -34,6 +35,7 @@ export interface CastRow {
   statureMm?: number;
   statureSource: StatureSource;
   weightKg?: number;
+  age?: number;
   measured: TapeMeasures;
   shoeMm?: number;
   clothing: Clothing;
@@ -93,6 +95,7 @@ export function readCastRow(
   const takenOn = reader.day('taken_on');
   const statureMm = reader.length('stature');
   const weightKg = reader.mass();
+  const age = reader.years();
   const shoeMm = reader.length('shoe');
   const value: CastRow = {
     name,
@@ -101,6 +104,7 @@ export function readCastRow(
     ...(statureMm === undefined ? {} : { statureMm }),
     statureSource: reader.word('stature_source', SOURCE_WORDS, 'measured or told') ?? 'told',
     ...(weightKg === undefined ? {} : { weightKg }),
+    ...(age === undefined ? {} : { age }),
     measured: reader.measured({ ...(takenBy ? { takenBy } : {}), ...(takenOn ? { takenOn } : {}) }),
     ...(shoeMm === undefined ? {} : { shoeMm }),
     clothing: reader.word('clothing', CLOTHING_WORDS, 'light, medium or heavy') ?? 'light',
@@ -163,6 +167,15 @@ class RowReader {
     const bare = this.column('weight')?.unit ?? this.setting.bareMass;
     const read = readMass(raw, { bare, decimalComma: this.setting.decimalComma });
     return this.checked('weight', raw, read, WEIGHT_LIMIT);
+  }
+
+  years(): number | undefined {
+    const raw = this.raw('age');
+    if (raw === '') return undefined;
+    const years = /^\d{1,3}$/.test(raw) ? Number(raw) : NaN;
+    if (within(AGE_LIMIT, years)) return years;
+    this.refuse('age', raw, `whole years, ${acceptedWords(AGE_LIMIT)}`, 'this is not such an age');
+    return undefined;
   }
 
   measured(taken: { takenBy?: string; takenOn?: string }): TapeMeasures {

@@ -1,7 +1,7 @@
 import { MEASURE_INFO, TAPE_MEASURE_KEYS, type TapeMeasureKey } from '@settlewright/anthropometry';
 
 export type TextColumn =
-  'name' | 'role' | 'body_data' | 'stature_source' | 'clothing' | 'notes' | 'taken_by' | 'taken_on';
+  'name' | 'role' | 'body_data' | 'stature_source' | 'age' | 'clothing' | 'notes' | 'taken_by' | 'taken_on';
 export type LengthColumn = 'stature' | 'shoe' | TapeMeasureKey;
 export type ColumnKey = TextColumn | LengthColumn | 'weight';
 
@@ -46,6 +46,7 @@ const PLAIN_WORDS: Record<ColumnKey, string[]> = {
   stature: ['height', 'standing height', 'body height', 'tall'],
   stature_source: ['height source', 'source', 'measured or told'],
   weight: ['weight kg', 'mass', 'body weight'],
+  age: ['years', 'years old'],
   shoe: ['shoes', 'shoe height', 'heel', 'heel height'],
   clothing: ['clothes', 'costume'],
   notes: ['note', 'remarks', 'comment'],

@@ -49,6 +49,16 @@ describe('reading a cast list', () => {
     });
   });
 
+  it('reads an age in whole years and refuses anything else', () => {
+    expect(first(metric('name,years old\nImre,41'))).toMatchObject({ age: 41 });
+    for (const age of ['9', '41.5', 'forty', '-3', '1000']) {
+      const [row] = metric(`name,age\nImre,${age}`).rows;
+      expect(row?.problems).toMatchObject([
+        { column: 'age', read: age, accepted: expect.stringContaining('16 to 110 years') },
+      ]);
+    }
+  });
+
   it('reads a byte-order mark, semicolons and decimal commas', () => {
     const csv = '\ufeffname;Height (cm);weight_kg\r\nHetty;151,1;48,25\r\n';
     expect(first(metric(csv))).toMatchObject({ name: 'Hetty', statureMm: 1511, weightKg: 48.25 });
@@ -142,6 +152,7 @@ describe('writing a cast list', () => {
     statureMm: 1575,
     statureSource: 'measured',
     weightKg: null,
+    age: null,
     measured: { popliteal_height: { mm: 394.5, takenBy: '@Nell', takenOn: '2026-01-25' } },
     shoeMm: 25,
     clothing: 'medium',

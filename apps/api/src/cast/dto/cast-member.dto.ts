@@ -38,6 +38,8 @@ export class CastMemberDto extends CastNameDto {
   statureSource: StatureSource;
   @ApiPropertyOptional()
   weightKg?: number;
+  @ApiPropertyOptional()
+  age?: number;
   @ApiProperty(measuredSchema)
   measured: TapeMeasures;
   @ApiProperty()
@@ -58,6 +60,7 @@ export class CastMemberDto extends CastNameDto {
       ...(person.statureMm === null ? {} : { statureMm: person.statureMm }),
       statureSource: person.statureSource,
       ...(person.weightKg === null ? {} : { weightKg: person.weightKg }),
+      ...(person.age === null ? {} : { age: person.age }),
       measured: person.measured,
       shoeMm: person.shoeMm,
       clothing: person.clothing,

@@ -42,6 +42,8 @@ export class CastRowDto {
   statureSource: string;
   @ApiPropertyOptional()
   weightKg?: number;
+  @ApiPropertyOptional()
+  age?: number;
   @ApiProperty(measuredSchema)
   measured: object;
   @ApiPropertyOptional()

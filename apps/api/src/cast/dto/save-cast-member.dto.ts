@@ -4,7 +4,7 @@ import { IsIn, IsInt, IsObject, IsOptional, Max, Min } from 'class-validator';
 import { TextField } from '../../common/text-field';
 import { BODY_DATA, CLOTHING, STATURE_SOURCES, type StatureSource } from '../entities/cast-member.entity';
 import { WithinLimit } from '../limit.decorator';
-import { NAME_MAX, NOTES_MAX, ROLE_MAX, SHOE_LIMIT, STATURE_LIMIT, WEIGHT_LIMIT } from '../limits';
+import { AGE_LIMIT, NAME_MAX, NOTES_MAX, ROLE_MAX, SHOE_LIMIT, STATURE_LIMIT, WEIGHT_LIMIT } from '../limits';
 import { measuredSchema } from './measured.schema';
 
 export class CreateCastMemberDto {
@@ -41,6 +41,18 @@ export class CreateCastMemberDto {
   @IsOptional()
   @WithinLimit(WEIGHT_LIMIT)
   weightKg?: number | null;
+
+  @ApiPropertyOptional({
+    type: 'integer',
+    nullable: true,
+    minimum: AGE_LIMIT.min,
+    maximum: AGE_LIMIT.max,
+    description: 'whole years',
+  })
+  @IsOptional()
+  @IsInt()
+  @WithinLimit(AGE_LIMIT)
+  age?: number | null;
 
   @ApiPropertyOptional({
     ...measuredSchema,

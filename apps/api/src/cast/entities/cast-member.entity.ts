@@ -60,6 +60,10 @@ export class CastMember {
   @Column({ type: 'double precision', nullable: true })
   weightKg: number | null;
 
+  /** Whole years; moves a few measures where stature and weight are known. */
+  @Column({ type: 'smallint', nullable: true })
+  age: number | null;
+
   @Column('jsonb')
   measured: TapeMeasures;
 

@@ -6,6 +6,7 @@ import { UpholstererOfMessages1796144400000 } from './1796144400000-upholsterer-
 import { ConfidenceOfAWorkshop1796157600000 } from './1796157600000-confidence-of-a-workshop';
 import { ErasedNames1796158800000 } from './1796158800000-erased-names';
 import { PopulationsAndStudies1796161490650 } from './1796161490650-populations-and-studies';
+import { AgeOfCastMembers1796165200000 } from './1796165200000-age-of-cast-members';
 
 /** In the order in which they run. What is merged is never changed. */
 export const MIGRATIONS: (new () => MigrationInterface)[] = [
@@ -16,4 +17,5 @@ export const MIGRATIONS: (new () => MigrationInterface)[] = [
   ConfidenceOfAWorkshop1796157600000,
   ErasedNames1796158800000,
   PopulationsAndStudies1796161490650,
+  AgeOfCastMembers1796165200000,
 ];

@@ -20,6 +20,7 @@ export interface CastInput {
   statureMm: number | null;
   statureSource: NonNullable<CastMember['statureSource']>;
   weightKg: number | null;
+  age: number | null;
   measured: Partial<Record<TapeMeasureKey, TapeReading>>;
   shoeMm?: number;
   clothing: NonNullable<CastMember['clothing']>;

@@ -2,6 +2,7 @@ import { TAPE_MEASURE_KEYS, type TapeMeasureKey } from '@settlewright/anthropome
 import { z } from 'zod';
 import { entryOf, type QuantityEntry } from '@/components/quantity-entry.ts';
 import type { CastMember, TapeReading } from '@/lib/contract.ts';
+import { AGE_YEARS } from '@/lib/body-limits.ts';
 import type { CastInput } from './api.ts';
 
 const quantity = z
@@ -22,6 +23,14 @@ export const personFormSchema = z.object({
   stature: quantity,
   statureSource: z.enum(['measured', 'told']),
   weight: quantity,
+  age: z
+    .string()
+    .trim()
+    .refine(
+      (text) =>
+        text === '' || (/^\d+$/.test(text) && Number(text) >= AGE_YEARS.min && Number(text) <= AGE_YEARS.max),
+      `Whole years, ${AGE_YEARS.min} to ${AGE_YEARS.max}.`,
+    ),
   shoe: quantity,
   clothing: z.enum(['light', 'medium', 'heavy']),
   notes: z.string().trim().max(4000, 'At most 4,000 characters.'),
@@ -50,6 +59,7 @@ export function formOf(person: CastMember | null): PersonForm {
     stature: entryOf(person?.statureMm),
     statureSource: person?.statureSource ?? 'told',
     weight: entryOf(person?.weightKg),
+    age: person?.age === undefined ? '' : String(person.age),
     shoe: entryOf(person?.shoeMm ?? STANDARD_SHOE_MM),
     clothing: person?.clothing ?? 'light',
     notes: person?.notes ?? '',
@@ -86,6 +96,7 @@ export function inputOf(form: PersonForm, person: CastMember | null): CastInput 
     statureMm: form.stature.value,
     statureSource: form.statureSource,
     weightKg: form.weight.value,
+    age: form.age === '' ? null : Number(form.age),
     measured: readings(form, person),
     ...(form.shoe.value === null ? {} : { shoeMm: form.shoe.value }),
     clothing: form.clothing,

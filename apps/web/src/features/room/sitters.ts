@@ -49,6 +49,7 @@ export function personOf(member: CastMember): KnownPerson | undefined {
     bodyData: member.bodyData,
     stature: member.statureMm ? { mm: member.statureMm, source: member.statureSource ?? 'told' } : undefined,
     weightKg: member.weightKg ?? undefined,
+    age: member.age,
     measured: Object.fromEntries(measured) as KnownPerson['measured'],
     shoeMm: member.shoeMm ?? 0,
     clothing: member.clothing ?? 'light',

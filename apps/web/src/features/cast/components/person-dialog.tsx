@@ -164,6 +164,14 @@ export function PersonDialog({ place, person, field: measure, onPrint, open, onC
             />
           )}
         />
+        <TextField
+          label="Age"
+          optional
+          inputMode="numeric"
+          description="Years; moves a few measures where height and weight are known."
+          error={errors.age?.message}
+          {...register('age')}
+        />
         <Controller
           control={control}
           name="bodyData"
