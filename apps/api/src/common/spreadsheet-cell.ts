@@ -21,6 +21,6 @@ function cellText(cell: Cell): string {
   if (cell === null || cell === undefined) return '';
   if (typeof cell === 'number') return Number.isFinite(cell) ? String(cell) : '';
   if (typeof cell === 'boolean') return cell ? 'yes' : 'no';
-  const safe = neutralised(cell);
-  return /[",;\n\r]/.test(safe) ? `"${safe.replaceAll('"', '""')}"` : safe;
+  const text = neutralised(cell);
+  return /[",;\n\r]/.test(text) ? `"${text.replaceAll('"', '""')}"` : text;
 }

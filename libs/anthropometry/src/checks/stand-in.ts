@@ -39,10 +39,10 @@ export interface StandInCheck {
   /** The sit by itself would show the wrong thing with the probability that a verdict asks for. */
   misleads: boolean;
   /**
-   * `safe`: the stand-in has less room, so a seat with room for the stand-in has room for the cast member. `unsafe`:
+   * `lessRoom`: the stand-in has less room, so a seat with room for the stand-in has room for the cast member. `moreRoom`:
    * the stand-in has more. `same`: neither has. `notKnown`: it is not sure which of the two has less.
    */
-  side: 'safe' | 'unsafe' | 'same' | 'notKnown';
+  side: 'lessRoom' | 'moreRoom' | 'same' | 'notKnown';
   /** For a sit that cannot tell: the measurement, of either of them, that narrows the difference most. */
   take?: { of: 'castMember' | 'standIn'; key: MeasureKey };
 }
@@ -173,7 +173,7 @@ function sideOf(difference: Difference, tolerance: number, asked: number): Stand
   const notLess = difference.atLeast(-tolerance) >= asked;
   const notMore = 1 - difference.atLeast(tolerance) >= asked;
   if (notLess && notMore) return 'same';
-  return notLess ? 'safe' : notMore ? 'unsafe' : 'notKnown';
+  return notLess ? 'lessRoom' : notMore ? 'moreRoom' : 'notKnown';
 }
 
 /** Measures that either room hangs on, in the order in which the rule names them. */

@@ -7,6 +7,9 @@ import { solidsNear, type Survey } from './survey.ts';
 const STEP_MM = 25;
 /** A route wider than this to either side is wide enough for anybody. */
 const WIDEST_HALF_MM = 1500;
+/** In a turn widths are taken at least this often, and over this much of the way to either side of each line across. */
+const TURN_STEP_RAD = Math.PI / 18;
+const TURN_HALF_MM = 50;
 /** Widths this close are one stretch. */
 const SAME_MM = 0.5;
 
@@ -23,7 +26,13 @@ export function routeStretches(found: Survey, corners: readonly Spot[]): RouteSt
     const from = corners[i] ?? to;
     const length = Math.hypot(to.xMm - from.xMm, to.zMm - from.zMm);
     if (length === 0) return;
-    const plan = { ...from, facingRad: Math.atan2(to.xMm - from.xMm, to.zMm - from.zMm) };
+    const facingRad = headingOf(from, to);
+    const before = corners[i - 1];
+    if (before !== undefined) {
+      const widthMm = turnWidth(found, from, headingOf(before, from), facingRad);
+      add(stretches, { widthMm, lengthMm: STEP_MM });
+    }
+    const plan = { ...from, facingRad };
     const near = solidsNear(found, plan, length + WIDEST_HALF_MM, () => true, isInTheWay);
     const steps = Math.max(1, Math.ceil(length / STEP_MM));
     for (let n = 0; n < steps; n += 1) {
@@ -32,6 +41,20 @@ export function routeStretches(found: Survey, corners: readonly Spot[]): RouteSt
     }
   });
   return stretches;
+}
+
+const headingOf = (from: Spot, to: Spot): number => Math.atan2(to.xMm - from.xMm, to.zMm - from.zMm);
+
+/** Least width across a turn about a corner, from one heading to the next. */
+function turnWidth(found: Survey, corner: Spot, from: number, to: number): number {
+  const turn = Math.atan2(Math.sin(to - from), Math.cos(to - from));
+  const steps = Math.max(1, Math.ceil(Math.abs(turn) / TURN_STEP_RAD));
+  const widths = Array.from({ length: steps - 1 }, (_, n) => {
+    const plan = { ...corner, facingRad: from + ((n + 1) * turn) / steps };
+    const near = solidsNear(found, plan, WIDEST_HALF_MM, () => true, isInTheWay);
+    return clearWidth(near, [-TURN_HALF_MM, TURN_HALF_MM]);
+  });
+  return Math.min(2 * WIDEST_HALF_MM, ...widths);
 }
 
 function add(stretches: RouteStretch[], next: RouteStretch): void {

@@ -130,6 +130,25 @@ describe('clear floor', () => {
     expect(Math.min(...onTheLine.map(({ widthMm }) => widthMm))).toBe(0);
   });
 
+  it('through a turn of a route: a post in its outer corner and one at its inner corner narrow it', () => {
+    const route = [
+      { xMm: 0, zMm: -2000 },
+      { xMm: 0, zMm: 0 },
+      { xMm: 2000, zMm: 0 },
+    ];
+    const post = (xMm: number, zMm: number, mark: string) =>
+      piece('bulkhead', mark, [xMm, zMm, 0], { lengthMm: 100, thicknessMm: 100 });
+    const least = (...posts: Piece[]) =>
+      Math.min(...(marked(posts, { route }).route ?? []).map(({ widthMm }) => widthMm));
+    expect(least()).toBe(3000);
+    // 300 square to either side of the corner, less the post's half: it lies beside neither leg.
+    const outer = least(post(-300, 300, 'W1'));
+    expect(outer).toBeGreaterThan(1500 + 300);
+    expect(outer).toBeLessThan(1500 + Math.hypot(300, 300));
+    const both = least(post(-300, 300, 'W1'), post(300, -300, 'W2'));
+    expect(both).toBeLessThan(2 * Math.hypot(300, 300));
+  });
+
   it('at the end of a bench kept accessible, at the better end', () => {
     const kept = { ...bench, accessible: true };
     const space = (...others: Piece[]) => measureSet(setOf([kept, ...others])).benches[0]?.endSpace;

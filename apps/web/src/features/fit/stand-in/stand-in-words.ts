@@ -28,8 +28,8 @@ export function standInWords(check: StandInCheck, pair: Pair, unit: RuleUnit, st
 }
 
 function sideWords({ side }: StandInCheck, them: string, sitter: string): string {
-  if (side === 'safe') return ` Room enough for ${sitter} is enough for ${them}.`;
-  if (side === 'unsafe') return ` ${capital(sitter)} has more room here than ${them}.`;
+  if (side === 'lessRoom') return ` Room enough for ${sitter} is enough for ${them}.`;
+  if (side === 'moreRoom') return ` ${capital(sitter)} has more room here than ${them}.`;
   return '';
 }
 
