@@ -5,6 +5,7 @@ import { OutboxAttachment } from '../src/mail/entities/outbox-attachment.entity'
 import { paperText } from './factories/papers';
 import { as, createMember } from './factories/people';
 import { createCastMember, createProduction, createSet, type SetPlace } from './factories/productions';
+import { surveyBody } from './factories/surveys';
 import { startTestApp, type TestApp } from './test-app';
 
 const NAME = 'Ottilie Brandt';
@@ -36,7 +37,14 @@ describe('a name that somebody typed', () => {
   const draftOf = async () => (await owner().get(`${place.setPath}/draft`)).body as Draft;
   const dump = async () => {
     const tables = ['productions', 'cast_members', 'sets', 'set_notes', 'set_drafts', 'set_revisions'];
-    const orders = ['revision_approvals', 'cushion_orders', 'order_events', 'order_messages'];
+    const orders = [
+      'revision_approvals',
+      'cushion_orders',
+      'order_events',
+      'order_messages',
+      'populations',
+      'studies',
+    ];
     const all: unknown[] = [];
     for (const table of [...tables, ...orders, 'outbox_mails', 'audit_entries']) {
       all.push(await test.dataSource.query(`SELECT * FROM ${table}`));
@@ -46,7 +54,7 @@ describe('a name that somebody typed', () => {
 
   /** The name in every text of a production. */
   beforeEach(async () => {
-    for (const table of ['productions', 'outbox_mails', 'audit_entries']) {
+    for (const table of ['productions', 'populations', 'outbox_mails', 'audit_entries']) {
       await test.dataSource.query(`DELETE FROM ${table}`);
     }
     const production = await createProduction(test, { name: SAID, summary: SAID });
@@ -56,7 +64,7 @@ describe('a name that somebody typed', () => {
     document.pieces.forEach((piece) => Object.assign(piece, { note: SAID, name: SAID }));
     const bench = document.pieces.find(({ kind }) => kind === 'bench')!;
     if (bench.kind === 'bench') bench.seatCushion.foam.grade = SAID;
-    document.knownDifferences = [{ id: 'd1', text: SAID }];
+    document.knownDifferences = [{ id: 'd1', text: SAID, by: NAME }];
     document.seating = [{ pieceId: bench.id, place: 1, sitter: { kind: 'cast', castId } }];
     await owner().put(`${place.setPath}/draft`).send({ baseNumber: 1, document }).expect(200);
     await made(`${place.setPath}/notes`, { kind: 'comment', text: SAID });
@@ -77,6 +85,12 @@ describe('a name that somebody typed', () => {
     orderPath = `${place.path}/orders/${order.id}`;
     await made(`${orderPath}/send`, { upholstererId: firm.id, message: SAID }, 200);
     await made(`${orderPath}/messages`, { text: SAID });
+    const survey = surveyBody({ name: SAID, source: SAID });
+    const { id: populationId } = await made(`/workshops/${place.workshop.id}/populations`, survey);
+    // One is counted at once, the other waits with the whole population in its question.
+    for (const people of [200, 50_000]) {
+      await made(`${place.setPath}/studies`, { populationId, people, draftNumber: 2 });
+    }
   });
 
   it('is shown at every place before the deed, and nothing is changed by looking', async () => {
@@ -104,6 +118,11 @@ describe('a name that somebody typed', () => {
       'Order 1, as it was sent, cover',
       'Order 1, letter to the upholsterer',
       'Order 1, letter not sent yet',
+      'Set, draft, who said so of known differences',
+      'Population, its name',
+      'Population, its source',
+      'Study, name of its population',
+      'Study, source of its population',
     ]) {
       expect(where).toContain(expected);
     }
@@ -127,7 +146,7 @@ describe('a name that somebody typed', () => {
     expect(all.includes(AFTER)).toBe(true);
     const { document, number } = await draftOf();
     expect(number).toBe(3);
-    expect(document.knownDifferences).toEqual([{ id: 'd1', text: AFTER }]);
+    expect(document.knownDifferences).toEqual([{ id: 'd1', text: AFTER, by: 'a person erased' }]);
     const { body: revision } = await owner().get(`${place.setPath}/revisions/A`).expect(200);
     expect(revision).toMatchObject({ note: AFTER, approvals: [{ comment: AFTER }] });
     const { body: order } = await owner().get(orderPath).expect(200);

@@ -1,7 +1,7 @@
 import type { Piece, SetDocument } from '@settlewright/geometry';
 
 /** The longest that the document's schema takes. */
-const MAX = { name: 80, note: 2000, grade: 60, difference: 1000 };
+const MAX = { name: 80, note: 2000, grade: 60, difference: 1000, by: 120 };
 
 type Change = (text: string, max: number, where: string) => string;
 
@@ -23,6 +23,7 @@ export function withTexts(
       ...(one.reason === undefined
         ? {}
         : { reason: fitted(one.reason, MAX.difference, 'known differences') }),
+      ...(one.by === undefined ? {} : { by: fitted(one.by, MAX.by, 'who said so of known differences') }),
     })),
   };
 }

@@ -5,15 +5,17 @@ import type { MemberInfo } from '../../common/access.decorator';
 import type { KeptRow } from '../../common/kept-text';
 import { PersonName } from '../../common/person-name';
 import { OrderTexts } from '../../cushion-orders/order-texts.service';
+import { populationTexts } from '../../populations/population-texts';
 import { productionTexts } from '../../productions/production-texts';
 import { SetTexts } from '../../sets/set-texts.service';
+import { studyTexts } from '../../studies/study-texts';
 import { CastService } from '../cast.service';
 import type { NamedPlaceDto, NamedPlacesDto } from './named-places.dto';
 
 /** Places shown of each kind; the counts are of all. */
 const SHOWN = 200;
 
-/** Finds a person's name in what people typed about a production, and takes it out. */
+/** Finds a person's name in what people typed about a production and the workshop’s populations, and takes it out. */
 @Injectable()
 export class ErasedNames {
   constructor(
@@ -75,6 +77,9 @@ export class ErasedNames {
     yield* await this.cast.textsOfOthers(manager, productionId, castId);
     yield* this.sets.of(manager, member, productionId, options);
     yield* this.orders.of(manager, productionId);
+    // Populations belong to the whole workshop, and so do the words that its studies copied from them.
+    yield* populationTexts(manager, member.workshopId);
+    yield* studyTexts(manager, member.workshopId, options);
   }
 }
 
