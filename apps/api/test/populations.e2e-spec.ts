@@ -160,6 +160,22 @@ describe('a population', () => {
     ]);
   });
 
+  it('keeps no row with a fault', async () => {
+    const odd = '999';
+    const csv = surveyCsv({ change: (cells, row) => (row === 1 ? cells.with(2, odd) : cells) });
+    const { id } = await add({ csv, name: 'One slip', keepRows: true });
+    const { text } = await as(test, owner).get(`${path}/${id}/rows.csv`).expect(200);
+    const rows = text.trim().split('\r\n');
+    expect(rows).toHaveLength(80);
+    const heights = rows.slice(1).map((row: string) => row.split(',')[1]);
+    expect(heights).toEqual(
+      csv
+        .split('\n')
+        .slice(2)
+        .map((row) => row.split(',')[2]),
+    );
+  });
+
   it('keeps no rows at the word of a designer', async () => {
     const { body } = await as(test, designer)
       .post(path)

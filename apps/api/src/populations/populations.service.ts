@@ -96,7 +96,8 @@ export class PopulationsService {
         }),
       );
       if (keepRows) {
-        await manager.insert(PopulationRows, { populationId: made.id, csv: keptRows(file, mapping) });
+        const csv = keptRows(file, mapping, checked);
+        await manager.insert(PopulationRows, { populationId: made.id, csv });
       }
       const { women, men, leftOut } = checked;
       await this.record(manager, member, 'population.added', made.id, { women, men, leftOut, keepRows });

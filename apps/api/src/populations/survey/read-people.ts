@@ -64,11 +64,17 @@ export function summaryOf({ people }: CheckedSurvey, source: string): WholeSumma
   return whole;
 }
 
-/** The columns that are used, as they stand in the file; nothing else of it. */
-export function keptRows(file: SurveyFile, { sex, age, measures }: Mapping): string {
+/** The columns that are used, as they stand in the file, of rows without a fault; nothing else of it. */
+export function keptRows(
+  file: SurveyFile,
+  { sex, age, measures }: Mapping,
+  { people }: CheckedSurvey,
+): string {
   const columns = [sex.column, ...(age ? [age] : []), ...measures.map(({ column }) => column)];
   const values = columns.map((column) => columnOf(file, column) ?? []);
-  return csvText([columns, ...file.rows.map((_, row) => values.map((column) => column[row] ?? ''))]);
+  const faulty = new Set(people.faults.map(({ row }) => row));
+  const rows = file.rows.map((_, row) => values.map((column) => column[row] ?? ''));
+  return csvText([columns, ...rows.filter((_, row) => !faulty.has(row + 1))]);
 }
 
 function tableOf(file: SurveyFile, { sex, age, measures, decimalComma }: Mapping): PeopleTable {
