@@ -3,8 +3,8 @@ import { benchLayout } from '../pieces/bench-layout.ts';
 import { clipped, extent, type PlanOutline, type PlanSolid } from './plan.ts';
 import { planOfPiece, solidsNear, type Survey } from './survey.ts';
 
-/** What hangs higher than this is in nobody's way on the floor, millimetres. */
-const OVER_HEADS_MM = 2032;
+/** What hangs higher than this is in nobody's way on the floor, millimetres: 80 in, ADA 307.4 (from memory). */
+export const OVER_HEADS_MM = 2032;
 const INCH_MM = 25.4;
 /** Clear floor is measured up to here; more asks nobody. */
 const FAR_MM = 2000;

@@ -6,12 +6,12 @@ import { planOfPiece, solidsNear, type Survey } from './survey.ts';
 
 type Bench = PieceOf<'bench'>;
 
-/** Floor before the seat that somebody needs to step out over, millimetres. */
+/** Floor before the seat that somebody needs to step out over, millimetres: shop rule. */
 const STEP_OUT_MM = 600;
-/** Nobody leaves through less than this. */
+/** Nobody leaves through less than this: shop rule, a large man's depth and a little more. */
 const NARROWEST_MM = 300;
 const TOUCHING_MM = 1e-6;
-/** What ends lower or begins higher than this is stepped over or walked under. */
+/** What ends lower or begins higher than this is stepped over or leaned under: shop rule. */
 const BODY_MM = [200, 1200] as const;
 /** Kinds that stand still; chairs are moved aside. */
 const STANDING: readonly PieceKind[] = ['bench', 'table', 'bulkhead', 'sill'];

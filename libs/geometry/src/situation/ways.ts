@@ -1,6 +1,7 @@
 import type { PlaceSituation, WaySituation } from '@settlewright/anthropometry';
 import { benchLayout } from '../pieces/bench-layout.ts';
 import type { PieceOf } from '../room/document.ts';
+import { OVER_HEADS_MM } from './clear-floor.ts';
 import { clipped, extent, inFrame } from './plan.ts';
 import { planOfPiece, rectangleOf, solidsNear, type Survey, type SurveyedPlace } from './survey.ts';
 
@@ -14,8 +15,6 @@ const TOGETHER_MM = 25;
 const WIDEST_WAY_MM = 2500;
 /** Sitters this near to looking straight apart sit back to back: 15°. */
 const OPPOSED_COSINE = Math.cos(Math.PI / 12);
-/** Walking room reaches up to here. */
-const HEAD_ROOM_MM = 2000;
 
 /**
  * Ways people go through: between the tables of a bench, behind loose seats, and between tables whose diners sit back
@@ -89,7 +88,7 @@ function behindSeat(
     (piece) => piece.kind !== 'loose-seat' && piece.kind !== 'overhead' && piece.id !== table.pieceId,
   );
   for (const { bottomMm, outline } of near) {
-    if (bottomMm >= HEAD_ROOM_MM) continue;
+    if (bottomMm >= OVER_HEADS_MM) continue;
     const behind = clipped(outline, {
       left: [-half, half],
       ahead: [-table.overlapMm - WIDEST_WAY_MM, seatRear],
