@@ -14,6 +14,7 @@ import {
   byRule,
   demandOf,
   joined,
+  silenceOf,
   type Demands,
   type GroupStudies,
   type GroupStudy,
@@ -30,13 +31,17 @@ interface Everywhere extends FitTally {
 }
 
 const NOBODY_COUNTED = { fits: { women: 0, men: 0 }, atLeastTight: { women: 0, men: 0 } } as const;
+const silence = (reason: string): FitTally => ({ ...NOBODY_COUNTED, unknown: false, silent: reason });
+
 /** Who is lost is told by these, and by the first measures that the rule itself reads. */
 const TELLING: readonly MeasureKey[] = ['stature', 'weight_kg'];
 const OWN_MEASURES = 2;
 
-/** Counts ticked rules at all ticked places together. */
-export const countAll = (studies: GroupStudies, ticks: Ticks): FitTally =>
-  counted(studies, joined(studies, ticks));
+/** Counts ticked rules at all ticked places together; silent where none of them speaks. */
+export function countAll(studies: GroupStudies, ticks: Ticks): FitTally {
+  const demands = joined(studies, ticks);
+  return demands ? counted(studies, demands) : silence(silenceOf(studies.women, ticks));
+}
 
 /**
  * Counts of one set without the people behind them: what a curve needs.
@@ -83,7 +88,7 @@ export function countStudy(studies: GroupStudies, ticks: Ticks, block: number): 
       .filter(ticks.place)
       .map((placeId) => ({
         placeId,
-        ...counted(studies, joined(studies, { ...ticks, place: (id) => id === placeId })),
+        ...countAll(studies, { ...ticks, place: (id) => id === placeId }),
       })),
     checks: checks.map((check, at) => checkCount(studies, check, checks.slice(at + 1), known)),
     all: countAll(studies, ticks),
@@ -107,7 +112,7 @@ function cellsOf(studies: GroupStudies): CellCount[] {
       ruleId: check.ruleId,
       ...(check.silent === undefined
         ? counted(studies, { women: check, men: men.places[place]?.checks[at] as CompiledCheck })
-        : { silent: check.silent, ...NOBODY_COUNTED, unknown: false }),
+        : silence(check.silent)),
     })),
   );
 }

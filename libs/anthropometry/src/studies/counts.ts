@@ -20,14 +20,14 @@ export interface FitTally {
   atLeastTight: Tally;
   /** True when a measure that is read is not known of these people; then nobody is counted as fitting. */
   unknown: boolean;
+  /** Why nothing is asked here; then nobody is counted. */
+  silent?: string;
 }
 
 /** One rule at one place. */
 export interface CellCount extends FitTally {
   placeId: string;
   ruleId: string;
-  /** Why the rule has nothing to say here; then nobody is counted. */
-  silent?: string;
 }
 
 /** One ticked rule at all ticked places together. */

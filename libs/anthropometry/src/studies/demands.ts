@@ -36,9 +36,23 @@ export function byRule({ places }: GroupStudy, ticks: Ticks): Map<string, Compil
   return rules;
 }
 
-/** Everything ticked as one demand on each sex. */
-export const joined = (studies: GroupStudies, ticks: Ticks): Demands =>
-  bothSexes(studies, (group) => demandOf([...byRule(studies[group], ticks).values()].flat()));
+/** Everything ticked as one demand on each sex; nothing where no ticked rule speaks, for that asks nothing. */
+export function joined(studies: GroupStudies, ticks: Ticks): Demands | undefined {
+  if (byRule(studies.women, ticks).size === 0) return undefined;
+  return bothSexes(studies, (group) => demandOf([...byRule(studies[group], ticks).values()].flat()));
+}
+
+/** Why no ticked rule speaks: the one reason of them all, or that there are several. */
+export function silenceOf({ places }: GroupStudy, ticks: Ticks): string {
+  const reasons = new Set(
+    places
+      .filter(({ placeId }) => ticks.place(placeId))
+      .flatMap(({ checks }) => checks.filter(({ ruleId }) => ticks.rule(ruleId)))
+      .map(({ silent }) => silent),
+  );
+  const [only, other] = reasons;
+  return only !== undefined && other === undefined ? only : 'none of these checks has anything to say';
+}
 
 export const demandOf = (checks: readonly CompiledCheck[]): Demands[Group] => ({
   fits: together(checks.map(({ fits }) => fits)),

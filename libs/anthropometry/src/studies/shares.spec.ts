@@ -252,6 +252,40 @@ describe('who is lost', () => {
   });
 });
 
+describe('a share of nothing', () => {
+  const silent = { kind: 'silent', reason: 'no sill' };
+  const bare = place({ placeId: 'b1:4', place: 4 });
+  const [beside] = places;
+  const ask = (at: typeof places, ruleIds: string[]) =>
+    createStudy(people, { ...setup, places: at, ticked: { ruleIds } });
+
+  it('is silent and not everybody, at a place and all at once', () => {
+    const { all, places: said, checks } = ask([bare], ['SILL-01']).shares();
+    expect(all).toEqual(silent);
+    expect(said).toEqual([{ placeId: 'b1:4', outcome: silent }]);
+    expect(checks).toEqual([]);
+    expect(ask([bare], []).shares().all.kind).toBe('silent');
+  });
+
+  it('leaves the share of the places where a rule speaks as it is', () => {
+    if (!beside) throw new Error('no place');
+    const { all, places: said } = ask([beside, bare], ['SILL-01']).shares();
+    expect(said[1]?.outcome).toEqual(silent);
+    expect(all).toEqual(ask([beside], ['SILL-01']).shares().all);
+  });
+
+  it('is no number on a curve or a map', () => {
+    const study = ask([bare], ['SILL-01']);
+    expect(curveOf(study, [1], () => [bare])[0]?.all.silent).toBe('no sill');
+    expect(mapOf(study, [1], [1], () => [bare]).all[0]?.[0]?.silent).toBe('no sill');
+  });
+
+  it('gives one reason only where there is one', () => {
+    const { all } = ask([bare], ['SILL-01', 'TABLE-01']).shares();
+    expect(all).toEqual({ kind: 'silent', reason: 'none of these checks has anything to say' });
+  });
+});
+
 describe('curves and maps', () => {
   const study = createStudy(people, setup);
   const values = [-40, -20, -5, 0, 5, 20, 60];

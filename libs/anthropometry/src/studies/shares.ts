@@ -68,20 +68,21 @@ const Z = normalQuantile(0.5 + RANGE / 2);
  */
 export function sharesOf(counts: PartialStudy, setup: ShareSetup = {}): StudyShares {
   const weights = weightsOf(counts.people, setup.mix);
-  const outcomeOf = (tally: FitTally): ShareOutcome =>
-    tally.unknown
-      ? { kind: 'notKnown' }
-      : {
-          kind: 'shares',
-          fits: groupShares(tally.fits, counts.people, weights, setup.surveyed),
-          atLeastTight: groupShares(tally.atLeastTight, counts.people, weights, setup.surveyed),
-        };
+  const outcomeOf = (tally: FitTally): ShareOutcome => {
+    if (tally.silent !== undefined) return { kind: 'silent', reason: tally.silent };
+    if (tally.unknown) return { kind: 'notKnown' };
+    return {
+      kind: 'shares',
+      fits: groupShares(tally.fits, counts.people, weights, setup.surveyed),
+      atLeastTight: groupShares(tally.atLeastTight, counts.people, weights, setup.surveyed),
+    };
+  };
   return {
     people: counts.people,
-    cells: counts.cells.map(({ placeId, ruleId, silent, ...tally }) => ({
+    cells: counts.cells.map(({ placeId, ruleId, ...tally }) => ({
       placeId,
       ruleId,
-      outcome: silent === undefined ? outcomeOf(tally) : { kind: 'silent', reason: silent },
+      outcome: outcomeOf(tally),
     })),
     places: counts.places.map(({ placeId, ...tally }) => ({ placeId, outcome: outcomeOf(tally) })),
     checks: counts.checks.map((check) => {

@@ -58,6 +58,16 @@ describe('a crowd that is asked', () => {
     expect(map.fits[0]).toEqual(curve.points.map(({ fits }) => fits));
   });
 
+  it('gives no number where no ticked check has anything to say', async () => {
+    const nothing = { ...ask(50), ticked: { ruleIds: [] } };
+    const places = placesAt(420);
+    const { points } = await desk.answer('curve', { ...nothing, values: [1], placesAt: [places] });
+    expect(points).toEqual([{ value: 1 }]);
+    const map = await desk.answer('map', { ...nothing, across: [1], up: [1], placesAt: [[places]] });
+    expect(map.fits).toEqual([[null]]);
+    expect((await desk.answer('shares', { ...nothing, places })).all.kind).toBe('silent');
+  });
+
   it('knows every population in the list by its own name, and no other', async () => {
     for (const { id } of CROWDS) expect((await peopleOf({ populationId: id, women: 50 })).id).toContain(id);
     await expect(peopleOf({ populationId: 'giants', women: 50 })).rejects.toThrow('giants');

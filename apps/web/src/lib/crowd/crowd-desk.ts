@@ -113,8 +113,10 @@ const toldOf = ({ name, source, cautions }: Population): CrowdTold => ({
 const sum = ({ women, men }: Tally): number => women + men;
 
 function shareOf(
-  { fits, atLeastTight, unknown }: FitTally,
+  { fits, atLeastTight, unknown, silent }: FitTally,
   people: number,
 ): { fits?: number; atLeastTight?: number } {
-  return unknown ? {} : { fits: sum(fits) / people, atLeastTight: sum(atLeastTight) / people };
+  return unknown || silent !== undefined
+    ? {}
+    : { fits: sum(fits) / people, atLeastTight: sum(atLeastTight) / people };
 }

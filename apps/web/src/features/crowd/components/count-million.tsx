@@ -102,7 +102,9 @@ function Ended({ study }: { study: ServerStudy }) {
           ? `Not counted: ${fault ?? 'the count failed'}`
           : outcome?.kind === 'shares'
             ? `${fineRange(outcome.fits.mixed)} in 100 fit ${ruleIds ? `${ruleIds.length} checks` : 'all checks'} at once`
-            : 'Not known: a measure that is read is not known of these people'}
+            : outcome?.kind === 'silent'
+              ? `Nothing to count: ${outcome.reason}`
+              : 'Not known: a measure that is read is not known of these people'}
       </span>
       <span className="block text-sm text-ink-2">
         {count(people)} people of {population.name}

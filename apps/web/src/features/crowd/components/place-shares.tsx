@@ -32,7 +32,9 @@ export function PlaceShares({ places }: { places: Shares['places'] }) {
                   </span>
                 </>
               ) : (
-                <span className="text-sm phone:col-span-2 text-ink-2">not known</span>
+                <span className="text-sm phone:col-span-2 text-ink-2">
+                  {outcome.kind === 'silent' ? outcome.reason : 'not known'}
+                </span>
               )}
             </li>
           );
