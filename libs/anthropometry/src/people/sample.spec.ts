@@ -108,6 +108,22 @@ describe('age', () => {
     expect((belly(50) - belly(20)) / 2000).toBeCloseTo(16, 2);
   });
 
+  it('is seen in the shoulder height that follows from the sitting height', () => {
+    const older = at({ age: 50 });
+    const { columns } = older.sample(4000, 1);
+    const meanOf = (key: MeasureKey) => (columns[key]?.reduce((sum, x) => sum + x, 0) ?? 0) / 4000;
+    expect(meanOf('acromial_height')).toBeCloseTo(older.mean('acromial_height'), 0);
+    expect(meanOf('acromial_height')).toBeCloseTo(
+      meanOf('acromial_height_sitting') + meanOf('stature') - meanOf('sitting_height'),
+      2,
+    );
+  });
+
+  it('leaves a shoulder height that was taken', () => {
+    const { columns } = at({ age: 50, measured: { acromial_height: 1445 } }).sample(20, 1);
+    expect(new Set(columns.acromial_height)).toEqual(new Set([1445]));
+  });
+
   it('is refused when it is no age', () => {
     expect(() => at({ age: -4 })).toThrow('age is -4; accepted: a number above 0');
   });

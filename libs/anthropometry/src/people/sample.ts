@@ -2,7 +2,7 @@ import { MEASURE_KEYS, type MeasureKey } from '../measures/measures.ts';
 import { drawPeople } from '../populations/draws.ts';
 import { drawOrder, factorRows, linearBodies, type BodyRow } from '../populations/linear-bodies.ts';
 import type { Draws, GroupBodies } from '../populations/population.ts';
-import { isLogged, toWorked } from '../populations/worked.ts';
+import { DERIVED, isLogged, toWorked } from '../populations/worked.ts';
 import type { WeightedPosterior } from './body-moments.ts';
 
 /**
@@ -32,9 +32,21 @@ export function samplePerson(
       });
     }
   }
+  if (parts.some(({ shift }) => shift.size > 0)) sumAgain(draws);
   // A derived measure that was taken is itself and not the sum of its parts.
   for (const [key, value] of fixed) draws.columns[key]?.fill(value);
   return draws;
+}
+
+/** Derived measures of people whose other measures were moved. */
+function sumAgain({ columns }: Draws): void {
+  for (const [key, parts] of Object.entries(DERIVED) as [MeasureKey, (typeof DERIVED)[MeasureKey] & {}][]) {
+    const own = columns[key];
+    const from = parts.map(([part, factor]) => ({ column: columns[part], factor }));
+    own?.forEach((_, row) => {
+      own[row] = from.reduce((sum, { column, factor }) => sum + factor * (column?.[row] as number), 0);
+    });
+  }
 }
 
 function bodiesOf(
