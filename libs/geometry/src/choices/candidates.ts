@@ -1,4 +1,4 @@
-import type { FitSheet } from '@settlewright/anthropometry';
+import type { FitSheet, SitterRow } from '@settlewright/anthropometry';
 import type { SetDocument } from '../room/document.ts';
 import type { Dimension } from './dimension.ts';
 import { stateOf } from './sheet-changes.ts';
@@ -16,9 +16,12 @@ export interface FreeDimension {
 /** A cast member's check that is not at least tight. */
 export interface Miss {
   sitterId: string;
-  ruleId: string;
-  /** Millimetres (or the rule's unit) missing to the fail line; 0 for what is not known. */
+  /** Absent where the sitter's place is gone altogether. */
+  ruleId?: string;
+  /** Millimetres (or the rule's unit) missing to the fail line; 0 for what is not known or no longer asked. */
   byMm: number;
+  /** The present set answers it and this one does not: it counts as the worst miss, never as a gain. */
+  gone?: true;
 }
 
 /** A choice of all free dimensions that was tried. Plain JSON, so that a search can go on from what is known. */
@@ -111,7 +114,7 @@ export function createTrials(input: SuggestInput): Trials {
     const sheet = check(document);
     return {
       values: [...values],
-      ...answersOf(sheet),
+      ...answersOf(before, sheet),
       worse: worseOf(before, sheet),
       ...(share ? { share: share(document) } : {}),
       distance: values.reduce((sum, value, i) => {
@@ -138,27 +141,64 @@ export function createTrials(input: SuggestInput): Trials {
 
 const keyOf = (values: readonly number[]): string => values.map((value) => value.toFixed(3)).join(' ');
 
-function answersOf(sheet: FitSheet): Pick<Tried, 'misses' | 'tight'> {
-  const misses: Miss[] = [];
-  let tight = 0;
-  for (const { sitterId, cells } of sheet.rows) {
-    for (const { ruleId, outcome } of cells) {
-      if (outcome.kind !== 'verdict') continue;
-      if (outcome.verdict === 'tight') tight += 1;
-      if (outcome.verdict === 'wontFit')
-        misses.push({ sitterId, ruleId, byMm: Math.max(0, -outcome.margin) });
-      if (outcome.verdict === 'notKnown') misses.push({ sitterId, ruleId, byMm: 0 });
-    }
-  }
-  return { misses, tight };
+/**
+ * What a sheet answers to the sitters, against the present one.
+ *
+ * @param before - sheet of the present set
+ * @param after - sheet of the set that is tried
+ * @returns misses, among them every verdict of the present sheet that is gone and every sitter without a place; and the
+ *   tight checks
+ */
+export function answersOf(before: FitSheet, after: FitSheet): Pick<Tried, 'misses' | 'tight'> {
+  const verdicts = after.rows.flatMap(({ sitterId, cells }) =>
+    cells.flatMap(({ ruleId, outcome }) =>
+      outcome.kind === 'verdict' ? [{ sitterId, ruleId, ...outcome }] : [],
+    ),
+  );
+  const failed = verdicts.flatMap(({ sitterId, ruleId, verdict, margin }): Miss[] => {
+    if (verdict === 'wontFit') return [{ sitterId, ruleId, byMm: Math.max(0, -margin) }];
+    return verdict === 'notKnown' ? [{ sitterId, ruleId, byMm: 0 }] : [];
+  });
+  return {
+    misses: [...failed, ...goneIn(before, after)],
+    tight: verdicts.filter(({ verdict }) => verdict === 'tight').length,
+  };
 }
+
+function goneIn(before: FitSheet, after: FitSheet): Miss[] {
+  const earlier = new Map(before.rows.map((row) => [row.sitterId, verdictRules(row)]));
+  const later = new Map(after.rows.map((row) => [row.sitterId, verdictRules(row)]));
+  const sitters = new Set([...earlier.keys(), ...later.keys()]);
+  return [...sitters].flatMap((sitterId): Miss[] => {
+    const now = later.get(sitterId) ?? [];
+    const left = [...now];
+    const gone = (earlier.get(sitterId) ?? []).filter((ruleId) => {
+      const at = left.indexOf(ruleId);
+      if (at >= 0) left.splice(at, 1);
+      return at < 0;
+    });
+    return [
+      // Somebody without a place keeps a row in which nothing is answered.
+      ...(now.length > 0 ? [] : [{ sitterId, byMm: 0, gone: true as const }]),
+      ...gone.map((ruleId) => ({ sitterId, ruleId, byMm: 0, gone: true as const })),
+    ];
+  });
+}
+
+const verdictRules = ({ cells }: SitterRow): string[] =>
+  cells.flatMap(({ ruleId, outcome }) => (outcome.kind === 'verdict' ? [ruleId] : []));
 
 const isGood = (state: ReturnType<typeof stateOf>): boolean =>
   state === 'fits' || state === 'tight' || state === 'inside';
 
-/** Answers about pieces and ways that were good and are not. */
-function worseOf(before: FitSheet, after: FitSheet): number {
+/**
+ * Answers about pieces and ways that were good and are not.
+ *
+ * @param before - sheet of the present set
+ * @param after - sheet of the set that is tried
+ * @returns how many; a good answer that is gone is one of them
+ */
+export function worseOf(before: FitSheet, after: FitSheet): number {
   const later = new Map(after.piecesAndWays.map((cell) => [cell.id, stateOf(cell)]));
-  return before.piecesAndWays.filter((cell) => isGood(stateOf(cell)) && !isGood(later.get(cell.id) ?? 'fits'))
-    .length;
+  return before.piecesAndWays.filter((cell) => isGood(stateOf(cell)) && !isGood(later.get(cell.id))).length;
 }

@@ -67,6 +67,29 @@ describe('two sheets side by side', () => {
     expect([joined, left]).toEqual([['came'], ['tall']]);
   });
 
+  it('tells a check that is no longer asked as a loss, even one that was missed, and a new one as neither', () => {
+    const without: SetDocument = { ...bay, pieces: bay.pieces.filter(({ kind }) => kind !== 'table') };
+    const [now, then] = [sheetOf(bay, [SMALL, TALL]), sheetOf(without, [SMALL, TALL])];
+    const table = (sheet: FitSheet) =>
+      sheet.rows[0]?.cells.flatMap(({ ruleId, outcome }) =>
+        ruleId.startsWith('TABLE-') && outcome.kind === 'verdict' ? [ruleId] : [],
+      ) ?? [];
+    const asked = table(now);
+    expect(asked.length).toBeGreaterThan(0);
+    expect(table(then)).toEqual([]);
+    const [small] = compareSheets(now, then).sitters;
+    const gone = small?.losses.filter(({ to }) => to === 'gone').map(({ ruleId }) => ruleId) ?? [];
+    expect(gone).toEqual(expect.arrayContaining(asked));
+    expect(small?.gains.map(({ ruleId }) => ruleId)).not.toContain(asked[0]);
+    const pieces = compareSheets(now, { ...then, piecesAndWays: [] }).pieces;
+    expect(pieces.losses.length).toBeGreaterThan(0);
+    expect(pieces.losses.every(({ to, after }) => to === 'gone' && after === undefined)).toBe(true);
+    const [back] = compareSheets(then, now).sitters;
+    expect([...(back?.gains ?? []), ...(back?.losses ?? [])].map(({ ruleId }) => ruleId)).not.toContain(
+      asked[0],
+    );
+  });
+
   it('finds nothing between a sheet and itself', () => {
     const sheet = sheetOf(bay, [SMALL, TALL]);
     const { sitters, pieces } = compareSheets(sheet, sheet);

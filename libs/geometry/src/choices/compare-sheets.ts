@@ -6,8 +6,10 @@ export interface ComparedCell {
   ruleId: string;
   marks: string[];
   before: FitCell;
-  after: FitCell;
+  /** Absent where the second sheet has no such cell. */
+  after?: FitCell;
   from: CellState;
+  /** `gone` where the second sheet no longer answers; that is a loss, whatever was answered before. */
   to: CellState;
 }
 
@@ -35,7 +37,8 @@ export interface ComparedSheets {
  *
  * @param before - the first sheet
  * @param after - the second sheet
- * @returns sitters that are in both, in the order of the second; a person keeps their answers when they change places
+ * @returns sitters that are in both, in the order of the second; a person keeps their answers when they change places.
+ *   A check that only the first sheet answers is a loss; one that only the second answers is new and not counted
  */
 export function compareSheets(before: FitSheet, after: FitSheet): ComparedSheets {
   const earlier = new Map(before.rows.map((row) => [row.sitterId, row]));
@@ -61,12 +64,14 @@ function pairs(
   after: readonly FitCell[],
   keyOf: (cell: FitCell) => string,
 ): ComparedCell[] {
-  const earlier = new Map(before.map((cell) => [keyOf(cell), cell]));
-  return after.flatMap((cell) => {
-    const then = earlier.get(keyOf(cell));
-    const [from, to] = [then && stateOf(then), stateOf(cell)];
-    if (!then || from === undefined || to === undefined) return [];
-    return [{ ruleId: cell.ruleId, marks: cell.marks, before: then, after: cell, from, to }];
+  const later = new Map(after.map((cell) => [keyOf(cell), cell]));
+  return before.flatMap((then): ComparedCell[] => {
+    const cell = later.get(keyOf(then));
+    const from = stateOf(then);
+    if (from === undefined) return [];
+    const { ruleId, marks } = cell ?? then;
+    const to = (cell && stateOf(cell)) ?? 'gone';
+    return [{ ruleId, marks, before: then, ...(cell ? { after: cell } : {}), from, to }];
   });
 }
 

@@ -51,7 +51,8 @@ export function costOf(
 ): number {
   const counted = without ? misses.filter((miss) => !without(miss)) : misses;
   const missed = counted.reduce(
-    (sum, { byMm }) => sum + COST.miss + Math.min(COST.missMost, COST.missPerMm * byMm),
+    (sum, { byMm, gone }) =>
+      sum + COST.miss + (gone ? COST.missMost : Math.min(COST.missMost, COST.missPerMm * byMm)),
     0,
   );
   return (
@@ -190,7 +191,10 @@ function least(all: readonly Tried[], costing: (tried: Tried) => number): Tried 
 function blameOf(all: readonly Tried[], missed: readonly Miss[]): Blame | undefined {
   const suspects: Omit<Blame, 'left'>[] = [
     ...[...new Set(missed.map(({ sitterId }) => sitterId))].map((id) => ({ kind: 'sitter' as const, id })),
-    ...[...new Set(missed.map(({ ruleId }) => ruleId))].map((id) => ({ kind: 'rule' as const, id })),
+    ...[...new Set(missed.flatMap(({ ruleId }) => ruleId ?? []))].map((id) => ({
+      kind: 'rule' as const,
+      id,
+    })),
   ];
   const judged = suspects.map((suspect): Blame => {
     const own = ({ sitterId, ruleId }: Miss) =>

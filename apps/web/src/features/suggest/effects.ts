@@ -34,9 +34,9 @@ export interface Effects {
   stays: Move[];
   better: PersonEffect[];
   worse: PersonEffect[];
-  /** Checks that are still not met, or not known. */
+  /** Checks that are still not met, not known or no longer asked. */
   short: PersonEffect[];
-  /** People with every check at least tight, of all. */
+  /** People with a place and every check at least tight, none of them gone; of everybody. */
   served: number;
   of: number;
   tight: number;
@@ -66,6 +66,11 @@ const isShort = ({ outcome }: FitCell): boolean =>
 /** Cells of a row that are not at least tight. */
 export const shortCells = (row: SitterRow): FitCell[] => row.cells.filter(isShort);
 
+/** Somebody without a place keeps a row in which nothing is answered. */
+const isAnswered = (row: SitterRow): boolean => row.cells.some(({ outcome }) => outcome.kind === 'verdict');
+
+const NO_PLACE = 'no place';
+
 interface Ground {
   document: SetDocument;
   dimensions: readonly Dimension[];
@@ -80,7 +85,16 @@ export function effectsOf(tried: Pick<Tried, 'values'>, ground: Ground): Effects
   const next = documentAt(ground, tried.values);
   if (!next) return undefined;
   const sheet = check(next);
-  const compared = compareSheets(check(document), sheet);
+  const before = check(document);
+  const compared = compareSheets(before, sheet);
+  const placed = new Set(sheet.rows.filter(isAnswered).map(({ sitterId }) => sitterId));
+  const unplaced = [...new Map([...before.rows, ...sheet.rows].map((row) => [row.sitterId, row])).values()]
+    .filter(({ sitterId }) => !placed.has(sitterId))
+    .map(({ sitterId, name }): PersonEffect => ({ sitterId, name, checks: [NO_PLACE] }));
+  const wasPlaced = new Set(before.rows.filter(isAnswered).map(({ sitterId }) => sitterId));
+  const isUnplaced = ({ sitterId }: Pick<PersonEffect, 'sitterId'>) => !placed.has(sitterId);
+  const goneOf = (sitterId: string) =>
+    compared.sitters.find((one) => one.sitterId === sitterId)?.losses.filter(({ to }) => to === 'gone') ?? [];
   const all = free.flatMap(({ dimensionId }, i): Move[] => {
     const dimension = dimensions.find(({ id }) => id === dimensionId);
     return dimension ? [{ dimension, from: dimension.value, to: tried.values[i] as number }] : [];
@@ -99,13 +113,28 @@ export function effectsOf(tried: Pick<Tried, 'values'>, ground: Ground): Effects
     moves: all.filter(isMove),
     stays: all.filter((move) => !isMove(move)),
     better: told(({ gains }) => gains),
-    worse: told(({ losses }) => losses),
-    short: sheet.rows.flatMap((row) => {
-      const checks = shortCells(row).map((cell) => checkWords(ruleBook, cell.ruleId));
-      return checks.length > 0 ? [{ sitterId: row.sitterId, name: row.name, checks }] : [];
-    }),
-    served: sheet.rows.filter((row) => shortCells(row).length === 0).length,
-    of: sheet.rows.length,
+    worse: [
+      ...told(({ losses }) => losses).filter((one) => !isUnplaced(one)),
+      ...unplaced.filter(({ sitterId }) => wasPlaced.has(sitterId)),
+    ],
+    short: [
+      ...sheet.rows
+        .filter((row) => !isUnplaced(row))
+        .flatMap((row) => {
+          const checks = [
+            ...shortCells(row).map((cell) => checkWords(ruleBook, cell.ruleId)),
+            ...goneOf(row.sitterId).map(
+              ({ ruleId }) => `${checkWords(ruleBook, ruleId)} ${STATE_WORDS.gone}`,
+            ),
+          ];
+          return checks.length > 0 ? [{ sitterId: row.sitterId, name: row.name, checks }] : [];
+        }),
+      ...unplaced,
+    ],
+    served: sheet.rows.filter(
+      (row) => isAnswered(row) && shortCells(row).length === 0 && goneOf(row.sitterId).length === 0,
+    ).length,
+    of: placed.size + unplaced.length,
     tight: sheet.counts.tight,
     piecesBetter: compared.pieces.gains.map(piece),
     piecesWorse: compared.pieces.losses.map(piece),

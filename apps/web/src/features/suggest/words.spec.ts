@@ -39,6 +39,31 @@ describe('words of a choice', () => {
     expect(of(lower.worse, 'Marcus')).toMatch(/seat height won’t fit/);
   });
 
+  it('never counts somebody as served whose checks or whose place are gone', () => {
+    const onlyAt = (drop: (mark: string) => boolean) => ({
+      ...ground,
+      check: (document: typeof bay) =>
+        check(
+          document === bay ? bay : { ...document, pieces: document.pieces.filter(({ mark }) => !drop(mark)) },
+        ),
+    });
+    const values = now.map((value, n) => (n === 0 ? value - 10 : value));
+    const noTable = effectsOf(
+      { values },
+      onlyAt((mark) => mark === 'T1'),
+    );
+    expect(noTable?.worse.map(({ name }) => name)).toEqual(['Hetty', 'Marcus']);
+    expect(noTable?.short[0]?.checks.join(', ')).toContain('no longer asked');
+    expect([noTable?.served, noTable?.of]).toEqual([0, 2]);
+    const noBench = effectsOf(
+      { values },
+      onlyAt((mark) => mark === 'B2'),
+    );
+    expect(noBench?.of).toBe(2);
+    expect(noBench?.worse.find(({ name }) => name === 'Marcus')?.checks).toEqual(['no place']);
+    expect(noBench?.short.find(({ name }) => name === 'Marcus')?.checks).toEqual(['no place']);
+  });
+
   it.each([
     [{ served: 2, of: 2 }, 'All 2 sitters are at least tight in every check.'],
     [{ served: 1, of: 2 }, '1 of 2 sitters is at least tight in every check.'],

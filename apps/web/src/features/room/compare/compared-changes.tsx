@@ -12,13 +12,15 @@ interface ListProps {
 }
 
 function State({ cell, when }: { cell: ComparedCell; when: 'before' | 'after' }) {
-  const { outcome } = cell[when];
-  if (outcome.kind === 'verdict') return <Verdict verdict={outcome.verdict} estimated={outcome.estimated} />;
+  const outcome = cell[when]?.outcome;
+  if (when === 'after' && cell.to === 'gone') return <span className="font-medium">no longer asked</span>;
+  if (outcome?.kind === 'verdict') return <Verdict verdict={outcome.verdict} estimated={outcome.estimated} />;
   return <span className="font-medium">{when === 'before' ? cell.from : cell.to} the clause</span>;
 }
 
-function marginOf({ outcome }: ComparedCell['before'], unit: string, style: LengthStyle): string | undefined {
-  if (outcome.kind !== 'verdict' || typeof outcome.margin !== 'number') return undefined;
+function marginOf(cell: ComparedCell['after'], unit: string, style: LengthStyle): string | undefined {
+  const outcome = cell?.outcome;
+  if (outcome?.kind !== 'verdict' || typeof outcome.margin !== 'number') return undefined;
   const { margin } = outcome;
   const size =
     unit === 'deg' ? formatAngle(margin) : unit === 'mm' ? formatLength(margin, style) : String(margin);
@@ -36,7 +38,7 @@ export function ComparedChanges({ cells, ruleBook, style, withMarks = false }: L
           marginOf(cell.after, rule.unit, style),
         ];
         return (
-          <li key={cell.after.id} className="border-b border-rule py-2 last:border-0">
+          <li key={cell.before.id} className="border-b border-rule py-2 last:border-0">
             <span className="block text-sm">
               <span className="font-medium">{rule.columnName}</span>
               {withMarks && <span className="text-ink-2"> {cell.marks.join(', ')}</span>}
