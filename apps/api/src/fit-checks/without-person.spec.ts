@@ -1,6 +1,8 @@
 import { describe, expect, it } from '@jest/globals';
 import type { FitCell, FitSheet, VerdictOutcome } from '@settlewright/anthropometry';
-import { withoutPerson } from './without-person';
+import { ARRANGEMENTS, measureSet } from '@settlewright/geometry';
+import { FitCheckService } from './fit-check.service';
+import { READS_NO_BODY, withoutPerson } from './without-person';
 
 const outcome: VerdictOutcome = {
   kind: 'verdict',
@@ -76,5 +78,38 @@ describe('a stored sheet without one person', () => {
 
   it('leaves a sheet alone that the person is not on', () => {
     expect(withoutPerson(sheet, { id: 'p9', name: 'Hetty' }, 'removed sitter 2')).toBe(sheet);
+  });
+});
+
+describe('the rules of pieces and ways', () => {
+  const READS_BODIES = ['SIDE-01', 'SIDE-04', 'SIDE-05', 'HEAD-04'];
+  const fit = new FitCheckService();
+  const document = ARRANGEMENTS.find(({ id }) => id === 'facing-benches')!.build();
+  document.asked.appleBoxes = { full: 0, half: 0, quarter: 0, pancake: 0 };
+  const seats = measureSet(document).places;
+  /** What each rule says of a full set, with everybody but the first of one body. */
+  const said = (percentile: number): Map<string, string> => {
+    const measure = 'stature' as const;
+    const sitter = { kind: 'mannequin' as const, bodyData: 'men' as const, measure, percentile };
+    const seating = seats.map(({ pieceId, place }, n) => ({
+      pieceId,
+      place,
+      sitter: { ...sitter, percentile: n === 0 ? 50 : percentile },
+    }));
+    const { piecesAndWays } = fit.sheetFor({ ...document, seating }, [], null);
+    const cellsOf = (id: string) => piecesAndWays.filter(({ ruleId }) => ruleId === id);
+    return new Map(piecesAndWays.map(({ ruleId }) => [ruleId, JSON.stringify(cellsOf(ruleId))]));
+  };
+  const [short, tall] = [said(5), said(95)];
+
+  it('are each said to read a body or not, unless they are clauses of a code', () => {
+    const asked = [...short.keys()].filter((id) => fit.ruleBook.rule(id).tier !== 'code');
+    expect(asked.toSorted()).toEqual([...READS_NO_BODY, ...READS_BODIES].toSorted());
+  });
+
+  it('say the same of other people where they read no body, and something else where they do', () => {
+    const changed = [...short.keys()].filter((id) => short.get(id) !== tall.get(id));
+    // No corner stands in these benches.
+    expect(changed.toSorted()).toEqual(READS_BODIES.filter((id) => id !== 'SIDE-05').toSorted());
   });
 });

@@ -1,12 +1,17 @@
 import type { FitCell, FitSheet, Outcome, VerdictOutcome } from '@settlewright/anthropometry';
 import { PersonName } from '../common/person-name';
 
-/** Rules about a bench, a table or a way that read nobody's body. All others lose their values. */
-const READS_NO_BODY: ReadonlySet<string> = new Set([
+/**
+ * Rules about a bench, a table or a way that read nobody's body. All others lose their values. Clauses of a code are
+ * not among them, as they give no verdict that could lose its numbers.
+ */
+export const READS_NO_BODY: ReadonlySet<string> = new Set([
   'SIDE-02',
   'SEAT-06',
   'SEAT-07',
   'BACK-01',
+  'BACK-02',
+  'BACK-04',
   'SILL-03',
   'TABLE-07',
   'TABLE-08',
@@ -14,6 +19,7 @@ const READS_NO_BODY: ReadonlySet<string> = new Set([
   'TABLE-10',
   'EGRESS-01',
   'EGRESS-02',
+  'EGRESS-08',
 ]);
 
 /** A verdict whose numbers went with the person they told of. */
