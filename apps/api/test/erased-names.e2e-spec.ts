@@ -1,7 +1,9 @@
-import { afterAll, beforeAll, beforeEach, describe, expect, it } from '@jest/globals';
+import { afterAll, beforeAll, beforeEach, describe, expect, it, jest } from '@jest/globals';
 import type { SetDocument } from '@settlewright/geometry';
 import { AuditEntry } from '../src/audit/entities/audit-entry.entity';
+import { HeldPapers } from '../src/cushion-orders/held-papers.service';
 import { OutboxAttachment } from '../src/mail/entities/outbox-attachment.entity';
+import { OutboxWorker } from '../src/mail/outbox-worker';
 import { paperText } from './factories/papers';
 import { as, createMember } from './factories/people';
 import { createCastMember, createProduction, createSet, type SetPlace } from './factories/productions';
@@ -166,6 +168,26 @@ describe('a name that somebody typed', () => {
     await erase();
     expect((await papers()).at(-1)).toContain('a person erased');
     expect((await papers()).at(-1)).not.toMatch(/OTTILIE/);
+  });
+
+  it('is on no paper that is sent, should the process end before it is drawn again', async () => {
+    const papers = test.app.get(HeldPapers);
+    const waiting = () => test.dataSource.manager.find(OutboxAttachment, { relations: { mail: true } });
+    const [before] = await waiting();
+    const ended = jest.spyOn(papers, 'redraw').mockRejectedValueOnce(new Error('the process ended'));
+    await owner().delete(`${place.path}/cast/${castId}`).expect(500);
+    ended.mockRestore();
+    expect((await waiting()).map(({ id, content }) => [id, content.length])).toEqual([[before?.id, 0]]);
+    // It waits, and goes once its paper is there.
+    const worker = test.app.get(OutboxWorker);
+    await test.dataSource.query(`DELETE FROM outbox_mails WHERE id <> $1`, [before?.mailId]);
+    expect(await worker.sendDue()).toBe(0);
+    const [held] = await waiting();
+    expect(held?.mail).toMatchObject({ state: 'queued', attempts: 0 });
+    await papers.redraw();
+    const [drawn] = await waiting();
+    expect(await paperText(drawn?.content ?? Buffer.of())).toContain('a person erased');
+    expect(await worker.sendDue()).toBe(1);
   });
 
   it('makes a save from before a conflict, as the draft went on', async () => {

@@ -6,6 +6,7 @@ import { UpholsterersModule } from '../upholsterers/upholsterers.module';
 import { UsersModule } from '../users/users.module';
 import { WorkshopsModule } from '../workshops/workshops.module';
 import { CushionOrder } from './entities/cushion-order.entity';
+import { HeldPapers } from './held-papers.service';
 import { IssuedSets } from './issued-sets.service';
 import { LinkController } from './link.controller';
 import { LinkService } from './link.service';
@@ -36,7 +37,8 @@ import { OrdersService } from './orders.service';
     OrderPaper,
     LinkService,
     OrderTexts,
+    HeldPapers,
   ],
-  exports: [OrdersService, OrderCorrespondence, LinkService, OrderTexts],
+  exports: [OrdersService, OrderCorrespondence, LinkService, OrderTexts, HeldPapers],
 })
 export class CushionOrdersModule {}

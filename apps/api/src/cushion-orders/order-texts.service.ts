@@ -1,24 +1,18 @@
 import { Injectable } from '@nestjs/common';
-import { InjectDataSource } from '@nestjs/typeorm';
-import { DataSource, type EntityManager } from 'typeorm';
+import type { EntityManager } from 'typeorm';
 import type { KeptRow, KeptText } from '../common/kept-text';
 import { MailService } from '../mail/mail.service';
 import { CushionOrder } from './entities/cushion-order.entity';
 import { OrderEvent } from './entities/order-event.entity';
 import { OrderMessage } from './entities/order-message.entity';
 import { type OrderContent, type OrderSpec, SPEC_KEYS } from './order-content';
-import { OrderPaper } from './order-paper.service';
 
 type Change = (text: string) => string;
 
 /** What people typed into the orders of a production, and what was exchanged about them. */
 @Injectable()
 export class OrderTexts {
-  constructor(
-    @InjectDataSource() private readonly dataSource: DataSource,
-    private readonly mail: MailService,
-    private readonly paper: OrderPaper,
-  ) {}
+  constructor(private readonly mail: MailService) {}
 
   async *of(manager: EntityManager, productionId: string): AsyncGenerator<KeptRow> {
     const orders = await manager.find(CushionOrder, { where: { productionId }, order: { number: 'ASC' } });
@@ -39,20 +33,6 @@ export class OrderTexts {
         };
       }
       yield* await this.mail.textsAbout(manager, order.id, where);
-    }
-  }
-
-  /** Papers that wait in the outbox are drawn again; after the texts were changed for good. */
-  async redrawWaitingPapers(productionId: string): Promise<void> {
-    const { manager } = this.dataSource;
-    const orders = await manager.find(CushionOrder, {
-      where: { productionId },
-      relations: { set: true, upholsterer: true },
-    });
-    for (const order of orders) {
-      const holding = await this.mail.holdingPaper(manager, order.id);
-      if (holding.length === 0 || !order.sent) continue;
-      await this.mail.replacePaper(manager, holding, await this.paper.pack(order, order.sent));
     }
   }
 }

@@ -6,6 +6,9 @@ import { InjectSettings, type Settings } from '../config/settings';
 import { OutboxAttachment } from './entities/outbox-attachment.entity';
 import { type MailState, OutboxMail } from './entities/outbox-mail.entity';
 
+/** SQL for an attachment called `paper` that waits to be drawn again. */
+export const HELD = 'octet_length(paper.content) = 0';
+
 /** Somebody may have read these. */
 const WENT_OUT: readonly MailState[] = ['sending', 'sent', 'perhaps-sent'];
 
@@ -89,13 +92,33 @@ export class MailService {
     }));
   }
 
-  /** Mails about something that still hold a paper, as they have not gone out for certain. */
-  async holdingPaper(manager: EntityManager, relatedId: string): Promise<string[]> {
-    const held = await manager.find(OutboxAttachment, {
-      where: { mail: { relatedId } },
-      select: { id: true, mailId: true },
-    });
-    return held.map(({ mailId }) => mailId);
+  /** Empties the papers of mails that have not gone out for certain; until they are replaced, none of these is sent. */
+  async holdPapers(manager: EntityManager, relatedIds: readonly string[]): Promise<void> {
+    await manager.query(
+      `UPDATE outbox_attachments SET content = '' FROM outbox_mails mail
+       WHERE mail.id = mail_id AND mail.related_id = ANY ($1)`,
+      [relatedIds],
+    );
+  }
+
+  /** What the mails with emptied papers are about. */
+  async withHeldPapers(manager: EntityManager): Promise<string[]> {
+    const rows: { id: string }[] = await manager.query(
+      `SELECT DISTINCT mail.related_id AS id FROM outbox_mails mail
+       JOIN outbox_attachments paper ON paper.mail_id = mail.id AND ${HELD}`,
+    );
+    return rows.map(({ id }) => id);
+  }
+
+  /** Mails about something with an emptied paper; nobody else changes it until the transaction ends. */
+  async lockHeldPapers(manager: EntityManager, relatedId: string): Promise<string[]> {
+    const rows: { id: string }[] = await manager.query(
+      `SELECT mail.id FROM outbox_mails mail
+       JOIN outbox_attachments paper ON paper.mail_id = mail.id AND ${HELD}
+       WHERE mail.related_id = $1 FOR UPDATE OF paper`,
+      [relatedId],
+    );
+    return rows.map(({ id }) => id);
   }
 
   async replacePaper(manager: EntityManager, mailIds: readonly string[], content: Buffer): Promise<void> {

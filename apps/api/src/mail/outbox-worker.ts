@@ -5,6 +5,7 @@ import { DataSource, In } from 'typeorm';
 import { InjectSettings, type Settings } from '../config/settings';
 import { OutboxAttachment } from './entities/outbox-attachment.entity';
 import { OutboxMail } from './entities/outbox-mail.entity';
+import { HELD } from './mail.service';
 import { type HandOver, MailTransport } from './mail-transport';
 
 const BATCH = 10;
@@ -81,6 +82,9 @@ export class OutboxWorker implements OnApplicationBootstrap, OnModuleDestroy {
       const due = await manager
         .createQueryBuilder(OutboxMail, 'mail')
         .where(`mail.state = 'queued' AND mail.nextAttemptAt <= now()`)
+        .andWhere(
+          `NOT EXISTS (SELECT 1 FROM outbox_attachments paper WHERE paper.mail_id = mail.id AND ${HELD})`,
+        )
         .orderBy('mail.nextAttemptAt')
         .limit(BATCH)
         .setLock('pessimistic_write')
@@ -107,6 +111,11 @@ export class OutboxWorker implements OnApplicationBootstrap, OnModuleDestroy {
 
   private async send(mail: OutboxMail): Promise<void> {
     const attachments = await this.dataSource.manager.findBy(OutboxAttachment, { mailId: mail.id });
+    // Emptied since the mail was claimed.
+    if (attachments.some(({ content }) => content.length === 0)) {
+      await this.release([mail]);
+      return;
+    }
     const result = await this.transport.handOver({
       to: mail.to,
       subject: mail.subject,

@@ -2,7 +2,7 @@ import { Injectable } from '@nestjs/common';
 import { DataSource } from 'typeorm';
 import { AuditService } from '../../audit/audit.service';
 import type { MemberInfo } from '../../common/access.decorator';
-import { OrderTexts } from '../../cushion-orders/order-texts.service';
+import { HeldPapers } from '../../cushion-orders/held-papers.service';
 import { RevisionsService } from '../../sets/revisions.service';
 import { CastService } from '../cast.service';
 import { ErasedNames } from './erased-names.service';
@@ -15,7 +15,7 @@ export class CastErasureService {
     private readonly cast: CastService,
     private readonly revisions: RevisionsService,
     private readonly names: ErasedNames,
-    private readonly orders: OrderTexts,
+    private readonly papers: HeldPapers,
     private readonly audit: AuditService,
   ) {}
 
@@ -25,6 +25,7 @@ export class CastErasureService {
       const { name, newName } = await this.cast.removePersonalData(manager, productionId, castId);
       await this.revisions.removePerson(manager, productionId, { id: castId, name }, newName);
       const found = await this.names.remove(manager, member, productionId, { id: castId, name });
+      await this.papers.hold(manager, productionId);
       await this.audit.record(manager, {
         workshopId: member.workshopId,
         userId: member.userId,
@@ -34,6 +35,6 @@ export class CastErasureService {
         detail: { ...found },
       });
     });
-    await this.orders.redrawWaitingPapers(productionId);
+    await this.papers.redraw();
   }
 }

@@ -20,6 +20,7 @@ export class OutboxAttachment {
   @Column('text')
   contentType: string;
 
+  /** Empty while it is to be drawn again: its mail waits. */
   @Column('bytea')
   content: Buffer;
 }
