@@ -63,7 +63,7 @@ export { dimensionIdOf, dimensionOf, dimensionsOf } from './choices/dimensions.t
 export { isGain, isLoss, sheetChanges, type CellChange, type CellState } from './choices/sheet-changes.ts';
 export { stickValues, storyStick } from './choices/story-stick.ts';
 export type { StickClause, StickRow, StoryStick } from './choices/story-stick.ts';
-export type { Stretch } from './choices/stretches.ts';
+export { whereAll, type Stretch } from './choices/stretches.ts';
 export { compareSheets } from './choices/compare-sheets.ts';
 export type { ComparedCell, ComparedSheets, ComparedSitter } from './choices/compare-sheets.ts';
 export {

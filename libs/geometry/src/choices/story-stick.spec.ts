@@ -147,9 +147,11 @@ describe('dimensions of a set', () => {
   it('says nothing of an empty set and keeps inside every limit', () => {
     expect(dimensionsOf(emptySetDocument())).toEqual([]);
     for (const dimension of dimensionsOf(bay())) {
-      expect(dimension.at(dimension.value), dimension.id).toBeDefined();
-      expect(dimension.at(dimension.min), `${dimension.id} at its least`).toBeDefined();
-      expect(dimension.at(dimension.max), `${dimension.id} at its most`).toBeDefined();
+      for (const value of [dimension.value, dimension.min, dimension.max]) {
+        const set = dimension.at(value);
+        const now = set && dimensionOf(set, dimension.id)?.value;
+        expect(now, `${dimension.id} at ${value}`).toBeCloseTo(value, 3);
+      }
     }
   });
 });
@@ -183,6 +185,45 @@ describe('a story stick of the seat height', () => {
     expect(told?.estimated).toBe(true);
     expect(told?.perhapsTight[0]?.from).toBeLessThan((band?.from ?? 0) - 5);
     expect(told?.surelyTight[0]?.from ?? Infinity).toBeGreaterThan((band?.from ?? 0) + 5);
+  });
+
+  it('holds in common only what every verdict of a told sitter passes, though the best guess passes more', () => {
+    const { values, rows, allFit, allTight } = stick;
+    const passes = (i: number) => rows.every(({ states }) => ['fits', 'tight'].includes(states[i] ?? 'gone'));
+    const inAll = values.map((value) => allTight.some(({ from, to }) => from <= value && value <= to));
+    expect(inAll).toEqual(values.map((_, i) => passes(i)));
+    const guessed = values.filter((value) =>
+      rows.every(({ tight }) => tight.some(({ from, to }) => from <= value && value <= to)),
+    );
+    expect(inAll.filter(Boolean).length).toBeLessThan(guessed.length);
+    for (const { from, to } of allFit) {
+      for (const [i, value] of values.entries()) {
+        if (value >= from && value <= to)
+          expect(rows.map(({ states }) => states[i])).toEqual(['fits', 'fits']);
+      }
+    }
+  });
+
+  it('is good nowhere where a check or a seat is gone', () => {
+    const height = named(document, 'seat-height');
+    const start = stickOf(height);
+    const cut: Dimension = {
+      ...height,
+      at: (value, on) => {
+        const set = height.at(value, on);
+        if (!set || value <= height.value + 1) return set;
+        return { ...set, pieces: set.pieces.filter(({ mark }) => mark !== 'B2') };
+      },
+    };
+    const { rows, ruleIds, allTight } = stickOf(cut);
+    expect(ruleIds).toContain('SEAT-05');
+    expect(rows).toHaveLength(start.rows.length);
+    for (const [i, value] of start.values.entries()) {
+      if (value > height.value + 1) expect(rows[1]?.states[i]).toBe('gone');
+      else expect(rows[1]?.states[i]).not.toBe('gone');
+    }
+    expect(rows[1]?.perhapsTight.every(({ to }) => to <= height.value + 1)).toBe(true);
+    expect(allTight.every(({ to }) => to <= height.value + 1)).toBe(true);
   });
 
   it('agrees with the sheet at every value', () => {

@@ -1,7 +1,8 @@
 import type { FitCell, FitSheet, SitterRow, VerdictOutcome } from '@settlewright/anthropometry';
 import type { SetDocument } from '../room/document.ts';
 import type { Dimension } from './dimension.ts';
-import { common, stretches, type Stretch } from './stretches.ts';
+import { movingRules } from './moving-rules.ts';
+import { stretches, whereAll, type Stretch } from './stretches.ts';
 import { cellsOf, STATE_RANK, stateOf, type CellState } from './sheet-changes.ts';
 
 /** One sitter's answer along a dimension. */
@@ -15,10 +16,14 @@ export interface StickRow {
   fits: Stretch[];
   /** Where the sitter is at least tight, by best values; holds `fits`. */
   tight: Stretch[];
-  /** Where 95 of 100 such people would be at least tight, and where 5 of 100 would; as `tight` when measured. */
+  /**
+   * Where each shown check keeps its fail line at the low end of its own 90 % range, and at the high end; as `tight`
+   * when measured. One check alone holds for 95, or for 5, of 100 such people; several together for no share that
+   * follows from their ranges.
+   */
   surelyTight: Stretch[];
   perhapsTight: Stretch[];
-  /** Worst verdict at each value. */
+  /** Worst verdict at each value; `gone` where a check that the present set answers no longer does. */
   states: CellState[];
 }
 
@@ -39,7 +44,10 @@ export interface StoryStick {
   ruleIds: string[];
   rows: StickRow[];
   clauses: StickClause[];
-  /** Values at which every row fits, and at which every row is at least tight; by best values. */
+  /**
+   * Tried values at which every row's verdict is fits, and at least tight: from one tried value to another, with the
+   * probability that verdicts are given from. What is not known is in neither.
+   */
   allFit: Stretch[];
   allTight: Stretch[];
 }
@@ -89,9 +97,10 @@ export function* storyStick(input: {
     }
     yield index + 1;
   }
-  const moving = movingRules(sheets);
+  const present = sheets[nearestTo(dimension.value, values)];
+  const moving = movingRules(present, sheets);
   const shown = ruleId === undefined ? moving : new Set([ruleId]);
-  const rows = (sheets[0]?.rows ?? []).map((row) => stickRow(row, values, sheets, shown));
+  const rows = (present?.rows ?? []).map((row) => stickRow(row, values, sheets, shown));
   const told = rows.filter(({ states }) => states.some((state) => state !== 'gone'));
   return {
     dimension,
@@ -99,29 +108,16 @@ export function* storyStick(input: {
     ruleIds: [...moving],
     rows: told,
     clauses: clausesOf(values, sheets),
-    allFit: common(told.map(({ fits }) => fits)),
-    allTight: common(told.map(({ tight }) => tight)),
+    allFit: whereAll(values, told, ['fits']),
+    allTight: whereAll(values, told, ['fits', 'tight']),
   };
 }
 
-/** Rules of which some cell's number or line changes along the dimension. */
-function movingRules(sheets: readonly FitSheet[]): Set<string> {
-  const [first] = sheets;
-  const moving = new Set<string>();
-  if (first === undefined) return moving;
-  const start = new Map(
-    first.rows.flatMap(({ cells }) => cells.map((cell) => [cell.id, said(cell)] as const)),
+const nearestTo = (value: number, values: readonly number[]): number =>
+  values.reduce(
+    (best, one, i) => (Math.abs(one - value) < Math.abs((values[best] as number) - value) ? i : best),
+    0,
   );
-  for (const sheet of sheets) {
-    for (const cell of sheet.rows.flatMap(({ cells }) => cells)) {
-      if (!moving.has(cell.ruleId) && start.get(cell.id) !== said(cell)) moving.add(cell.ruleId);
-    }
-  }
-  return moving;
-}
-
-const said = ({ outcome }: FitCell): string =>
-  outcome.kind === 'verdict' ? `${outcome.margin.toFixed(6)} ${outcome.value.toFixed(6)}` : outcome.kind;
 
 function stickRow(
   row: SitterRow,
@@ -133,9 +129,18 @@ function stickRow(
     const cells = sheet.rows.find(({ placeId }) => placeId === row.placeId)?.cells ?? [];
     return cells.filter(({ ruleId, outcome }) => shown.has(ruleId) && outcome.kind === 'verdict');
   });
+  const asked = new Set(
+    row.cells
+      .filter(({ ruleId, outcome }) => shown.has(ruleId) && outcome.kind === 'verdict')
+      .map(({ ruleId }) => ruleId),
+  );
+  const isGone = (cells: readonly FitCell[]) =>
+    [...asked].some((id) => cells.every(({ ruleId }) => ruleId !== id));
   const rooms = (room: (outcome: VerdictOutcome) => number) =>
     along.map((cells) =>
-      Math.min(...cells.map(({ outcome }) => (outcome.kind === 'verdict' ? room(outcome) : Infinity))),
+      isGone(cells)
+        ? -Infinity
+        : Math.min(...cells.map(({ outcome }) => (outcome.kind === 'verdict' ? room(outcome) : Infinity))),
     );
   const { sitterId, placeId, name } = row;
   return {
@@ -158,7 +163,7 @@ function stickRow(
       values,
       rooms(({ margin, marginRange }) => marginRange?.high ?? margin),
     ),
-    states: along.map(worstOf),
+    states: along.map((cells) => (isGone(cells) ? 'gone' : worstOf(cells))),
   };
 }
 

@@ -1,3 +1,5 @@
+import type { CellState } from './sheet-changes.ts';
+
 /** A stretch of values. */
 export interface Stretch {
   from: number;
@@ -44,17 +46,23 @@ function crossing(
   return from + share * (to - from);
 }
 
-/** What several lists of stretches have in common. */
-export function common(lists: readonly (readonly Stretch[])[]): Stretch[] {
-  const [first, ...rest] = lists;
-  return rest.reduce<Stretch[]>(
-    (kept, list) =>
-      kept.flatMap((a) =>
-        list.flatMap((b) => {
-          const both = { from: Math.max(a.from, b.from), to: Math.min(a.to, b.to) };
-          return both.from <= both.to ? [both] : [];
-        }),
-      ),
-    [...(first ?? [])],
+/**
+ * Tried values at which every row answers with one of some states.
+ *
+ * @param values - rising values that were tried
+ * @param rows - the rows; without any there is no such value
+ * @param good - states that count
+ * @returns stretches from one tried value to another
+ */
+export function whereAll(
+  values: readonly number[],
+  rows: readonly { states: readonly CellState[] }[],
+  good: readonly CellState[],
+): Stretch[] {
+  if (rows.length === 0) return [];
+  const isGood = (i: number) => rows.every(({ states }) => good.includes(states[i] ?? 'gone'));
+  return stretches(
+    values,
+    values.map((_, i) => (isGood(i) ? 0 : -Infinity)),
   );
 }

@@ -55,14 +55,17 @@ describe('the value that serves most', () => {
 
 describe('who is seated elsewhere', () => {
   it('is the fewest without whom a value suits the others', () => {
-    const elsewhere = seatElsewhere({ rows: [hetty, ottilie, marcus], allTight: [] }, 18 * INCH);
+    const elsewhere = seatElsewhere(
+      { values: VALUES, rows: [hetty, ottilie, marcus], allTight: [] },
+      18 * INCH,
+    );
     expect(elsewhere?.rows.map(({ name }) => name)).toEqual(['Hetty Vance']);
-    expect(elsewhere?.others).toEqual(inches([16.375, 17]));
+    expect(elsewhere?.others).toEqual(inches([17, 17]));
   });
 
   it('is nobody when one value suits all', () => {
     expect(
-      seatElsewhere({ rows: [hetty, ottilie], allTight: [inches([14, 15.875])] }, 18 * INCH),
+      seatElsewhere({ values: VALUES, rows: [hetty, ottilie], allTight: [inches([14, 15.875])] }, 18 * INCH),
     ).toBeUndefined();
   });
 
@@ -83,17 +86,45 @@ describe('the words under the laths', () => {
 
   it('say what everybody needs when nothing suits all', () => {
     expect(
-      commonWords({ dimension, rows: [hetty, ottilie, marcus], allFit: [], allTight: [] }, options),
+      commonWords(
+        { dimension, values: VALUES, rows: [hetty, ottilie, marcus], allFit: [], allTight: [] },
+        options,
+      ),
     ).toBe(
-      'No value suits all three: Hetty needs 15⅞″ or less, Marcus 16⅜″ or more. Seat Hetty elsewhere, and 16⅜″ to 17″ suits the others.',
+      'No value suits all three: Hetty needs 15⅞″ or less, Marcus 16⅜″ or more. Seat Hetty elsewhere, and 17″ suits the others.',
     );
+  });
+
+  it('never call a best guess a pass: who is not known is not suited', () => {
+    const guessed: StickRow = {
+      ...ottilie,
+      name: 'Nell Ashby',
+      estimated: true,
+      states: VALUES.map(() => 'notKnown'),
+    };
+    const rows = [hetty, guessed];
+    const words = commonWords({ dimension, values: VALUES, rows, allFit: [], allTight: [] }, options);
+    expect(words).toBe(
+      'No value is known to suit all two. None is known to suit Nell. Seat Nell elsewhere, and 14″ to 15″ suits the others.',
+    );
+    expect(seatElsewhere({ values: VALUES, rows: [guessed], allTight: [] }, 18 * INCH)).toBeUndefined();
+  });
+
+  it('say of an estimated end that it is a best guess', () => {
+    const guessed: StickRow = { ...marcus, estimated: true };
+    expect(
+      commonWords({ dimension, values: VALUES, rows: [hetty, guessed], allFit: [], allTight: [] }, options),
+    ).toContain('Hetty needs 15⅞″ or less, Marcus 16⅜″ or more (est., best guess).');
   });
 
   it('round the ends of a common band inwards', () => {
     const band = { from: 15.01 * INCH, to: 15.99 * INCH };
-    expect(commonWords({ dimension, rows: [hetty, ottilie], allFit: [], allTight: [band] }, options)).toBe(
-      '15⅛″ to 15⅞″ is at least tight for all two; no value fits all two.',
-    );
+    expect(
+      commonWords(
+        { dimension, values: VALUES, rows: [hetty, ottilie], allFit: [], allTight: [band] },
+        options,
+      ),
+    ).toBe('15⅛″ to 15⅞″ is at least tight for all two; no value fits all two.');
   });
 
   it('count verdicts for the slider', () => {

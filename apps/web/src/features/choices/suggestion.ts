@@ -1,4 +1,10 @@
-import type { StickRow, StoryStick, Stretch } from '@settlewright/geometry';
+import {
+  whereAll,
+  type CellState,
+  type StickRow,
+  type StoryStick,
+  type Stretch,
+} from '@settlewright/geometry';
 
 /** A value of the dimension and whom it serves. */
 export interface Served {
@@ -36,41 +42,30 @@ export function bestValue(stick: Answers, present: number): Served | undefined {
 /** The fewest people without whom a value is at least tight for everybody else. */
 export interface Elsewhere {
   rows: StickRow[];
-  /** What suits the others. */
+  /** Tried values that suit the others. */
   others: Stretch;
 }
 
-const holds = (row: StickRow, value: number): boolean =>
-  row.tight.some(({ from, to }) => from - 1e-6 <= value && value <= to + 1e-6);
+/** Verdicts that serve; what is not known does not. */
+export const SERVED: readonly CellState[] = ['fits', 'tight'];
 
-/** Whom to seat elsewhere; nothing when one value is at least tight for all, or for nobody. */
+/** Whom to seat elsewhere, by their verdicts; nothing when one value is at least tight for all, or for nobody. */
 export function seatElsewhere(
-  { rows, allTight }: Pick<StoryStick, 'rows' | 'allTight'>,
+  { values, rows, allTight }: Pick<StoryStick, 'values' | 'rows' | 'allTight'>,
   present: number,
 ): Elsewhere | undefined {
   if (allTight.length > 0) return undefined;
-  const ends = rows.flatMap(({ tight }) => tight.flatMap(({ from, to }) => [from, to]));
-  const sorted = [...ends].sort((a, b) => Math.abs(a - present) - Math.abs(b - present));
-  let best: { value: number; kept: StickRow[] } | undefined;
-  for (const value of sorted) {
-    const kept = rows.filter((row) => holds(row, value));
-    if (!best || kept.length > best.kept.length) best = { value, kept };
-  }
-  if (!best) return undefined;
-  const { value, kept } = best;
-  const around = kept.flatMap(({ tight }) =>
-    tight.filter(({ from, to }) => from - 1e-6 <= value && value <= to + 1e-6),
+  const best = bestValue({ values, rows }, present);
+  if (!best || best.served === 0) return undefined;
+  const at = values.indexOf(best.value);
+  const isKept = ({ states }: StickRow) => SERVED.includes(states[at] ?? 'gone');
+  const others = whereAll(values, rows.filter(isKept), SERVED).find(
+    ({ from, to }) => from <= best.value && best.value <= to,
   );
-  return {
-    rows: rows.filter((row) => !kept.includes(row)),
-    others: {
-      from: Math.max(...around.map(({ from }) => from)),
-      to: Math.min(...around.map(({ to }) => to)),
-    },
-  };
+  return others && { rows: rows.filter((row) => !isKept(row)), others };
 }
 
-/** Two sitters that no value serves together: who needs the least, and who the most. */
+/** Two sitters that no value serves together, by best guess of who is not measured: who needs the least, and who the most. */
 export function furthestApart(rows: readonly StickRow[]): { low: StickRow; high: StickRow } | undefined {
   const told = rows.filter(({ tight }) => tight.length > 0);
   const topOf = (row: StickRow) => row.tight.at(-1)?.to ?? 0;

@@ -57,7 +57,7 @@ function Grain({ from, to, y }: { from: number; to: number; y: number }) {
   );
 }
 
-/** Fades over the range that holds 90 in 100; the best guess is dashed. */
+/** Fades over the range that holds 90 in 100 for each check by itself; the best guess is dashed. */
 function Doubtful({ row, band, x, y }: LathProps & { band: Stretch }) {
   const id = useId();
   const outer = holding(row.perhapsTight, band) ?? band;

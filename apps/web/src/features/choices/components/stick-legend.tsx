@@ -31,7 +31,7 @@ export const StickLegend = memo(function StickLegend({
               'h-3.5 border-x-0 bg-oak-1 [mask:linear-gradient(90deg,transparent,#000_35%,#000_65%,transparent)]',
             )}
           />
-          est., ends fade over the range that holds 90 in 100, best guess dashed
+          est., ends fade over the 90 in 100 range of each check by itself, best guess dashed
         </span>
       </p>
       <p className="font-medium text-ink">
