@@ -289,11 +289,30 @@ describe('a long study', () => {
     expect(failed).not.toHaveProperty('result');
   });
 
+  it('fails in words when the rules have changed since it was begun', async () => {
+    workers.forEach((worker) => worker.signal('SIGSTOP'));
+    const { id } = await start(SHORT);
+    await test.dataSource.query(
+      `UPDATE studies SET question = jsonb_set(question, '{ruleVersion}', '"before"') WHERE id = $1`,
+      [id],
+    );
+    workers.forEach((worker) => worker.signal('SIGCONT'));
+    const failed = await untilEnded(id);
+    expect(failed).toMatchObject({
+      state: 'failed',
+      fault: expect.stringMatching(/version before of the fit rules/),
+    });
+  });
+
   it('is not begun while five others are not done', async () => {
     workers.forEach((worker) => worker.signal('SIGSTOP'));
-    for (let n = 0; n < 5; n += 1) await start(SHORT);
-    const { body } = await as(test, owner).post(studies()).send(asked(SHORT)).expect(409);
-    expect(body.code).toBe('too-many-studies');
+    // All at once, so that none sees the others' studies before they are kept.
+    const answers = await Promise.all(
+      Array.from({ length: 7 }, () => as(test, owner).post(studies()).send(asked(SHORT))),
+    );
+    expect(answers.map(({ status }) => status).sort()).toEqual([201, 201, 201, 201, 201, 409, 409]);
+    const refused = answers.find(({ status }) => status === 409);
+    expect(refused?.body.code).toBe('too-many-studies');
     workers.forEach((worker) => worker.signal('SIGCONT'));
   });
 });

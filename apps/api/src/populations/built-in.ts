@@ -1,18 +1,9 @@
-import {
-  childrenOfMark,
-  civilians2015,
-  nationalPopulations,
-  readChildren,
-  readSurvey,
-  soldiers2012,
-  type Survey,
-} from '@settlewright/anthropometry';
+import { builtInPopulations, readSurvey, type Population, type Survey } from '@settlewright/anthropometry';
 import { readSeedData } from '../common/seed-data';
-import type { Crowd } from './crowd';
 
 interface BuiltIn {
   soldiers: Survey;
-  crowds: ReadonlyMap<string, Crowd>;
+  populations: ReadonlyMap<string, Population>;
 }
 
 let read: BuiltIn | undefined;
@@ -23,29 +14,19 @@ function builtIn(): BuiltIn {
 }
 
 function readBuiltIn(): BuiltIn {
-  const summary = readSeedData('populations/ansur2');
-  const soldiers = readSurvey(summary);
-  const children = readChildren(readSeedData('populations/children'));
-  const crowds: Crowd[] = [
-    { population: soldiers2012(soldiers), surveyed: countedIn(summary as Summary) },
-    { population: civilians2015(readSeedData('populations/civilian-2015')) },
-    ...nationalPopulations(readSeedData('populations/nations'), soldiers).map((population) => ({
-      population,
-    })),
-    ...children.marks.map(({ mark }) => ({ population: childrenOfMark(children, mark) })),
-  ];
-  return { soldiers, crowds: new Map(crowds.map((crowd) => [crowd.population.id, crowd])) };
+  const ansur2 = readSeedData('populations/ansur2');
+  const populations = builtInPopulations({
+    ansur2,
+    civilian: readSeedData('populations/civilian-2015'),
+    nations: readSeedData('populations/nations'),
+    children: readSeedData('populations/children'),
+  });
+  return { soldiers: readSurvey(ansur2), populations };
 }
-
-interface Summary {
-  log: { women: { n: number }; men: { n: number } };
-}
-
-const countedIn = ({ log }: Summary) => ({ women: log.women.n, men: log.men.n });
 
 /** The survey that bounds what is taken for a body, and from which missing measures are estimated. */
 export const referenceSurvey = (): Survey => builtIn().soldiers;
 
-export const builtInCrowd = (id: string): Crowd | undefined => builtIn().crowds.get(id);
+export const builtInPopulation = (id: string): Population | undefined => builtIn().populations.get(id);
 
-export const builtInIds = (): string[] => [...builtIn().crowds.keys()];
+export const builtInIds = (): string[] => [...builtIn().populations.keys()];

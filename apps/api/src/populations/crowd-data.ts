@@ -1,21 +1,17 @@
-import { ownPopulation, readSurvey, type WholeSummary } from '@settlewright/anthropometry';
-import { builtInCrowd } from './built-in';
-import type { Crowd } from './crowd';
+import { ownPopulation, readSurvey, type Population, type WholeSummary } from '@settlewright/anthropometry';
+import { builtInPopulation } from './built-in';
 
 /** All it takes to make a crowd again elsewhere, whatever becomes of the population meanwhile. */
 export type CrowdData =
   | { kind: 'built-in'; id: string }
   | { kind: 'own'; id: string; name: string; source: string; summary: WholeSummary };
 
-export function crowdFrom(data: CrowdData): Crowd {
+export function crowdFrom(data: CrowdData): Population {
   if (data.kind === 'built-in') {
-    const crowd = builtInCrowd(data.id);
-    if (!crowd) throw new Error(`no population ${data.id} comes with this version`);
-    return crowd;
+    const population = builtInPopulation(data.id);
+    if (!population) throw new Error(`no population ${data.id} comes with this version`);
+    return population;
   }
   const { id, name, source, summary } = data;
-  return {
-    population: ownPopulation(readSurvey(summary), { id, name, source, licence: 'the workshop’s own' }),
-    surveyed: { women: summary.log.women.n, men: summary.log.men.n },
-  };
+  return ownPopulation(readSurvey(summary), { id, name, source, licence: 'the workshop’s own' });
 }

@@ -1,4 +1,4 @@
-import { PERSON_CHECKS, type PlaceSituation } from '@settlewright/anthropometry';
+import { PERSON_CHECKS, unlikePlaces, type PlaceSituation } from '@settlewright/anthropometry';
 import { measureSet, type SetDocument } from '@settlewright/geometry';
 import { Problem, type ProblemField } from '../common/problem';
 import { crowdFrom, type CrowdData } from '../populations/crowd-data';
@@ -7,16 +7,18 @@ import type { StudyQuestion } from './study-question';
 
 const WHOLE = 100;
 const EVENLY = 50;
+/** Places alike are counted once; of so many unlike ones a block of people still takes seconds. */
+const MOST_UNLIKE_PLACES = 200;
 
 /** What is to be counted, or everything in the request that keeps it from being counted. */
 export function readQuestion(
   dto: StartStudyDto,
   document: SetDocument,
   crowd: CrowdData,
-  blockPeople: number,
+  { blockPeople, ruleVersion }: Pick<StudyQuestion, 'blockPeople' | 'ruleVersion'>,
 ): StudyQuestion {
   const { places } = measureSet(document);
-  const groups = crowdFrom(crowd).population.groups.map(({ group }) => group);
+  const groups = crowdFrom(crowd).groups.map(({ group }) => group);
   const faults = [
     ...placeFaults(dto.placeIds, places),
     ...strangers('ruleIds', dto.ruleIds, [...RULES], 'no rule asked of one sitter has the id'),
@@ -26,6 +28,7 @@ export function readQuestion(
   const { people, ruleIds, placeIds } = dto;
   const { lensHeightMm } = document.asked;
   return {
+    ruleVersion,
     crowd,
     ...(groups.length > 1 ? { womenShare: (dto.womenPercent ?? EVENLY) / WHOLE } : {}),
     people,
@@ -43,6 +46,11 @@ function placeFaults(asked: string[] | undefined, places: PlaceSituation[]): Pro
   if (places.length === 0) {
     const message = 'the set has no place to sit at; accepted: a set with a bench or a loose seat';
     return [{ path: 'placeIds', code: 'no-places', message }];
+  }
+  const unlike = unlikePlaces(places).length;
+  if (unlike > MOST_UNLIKE_PLACES) {
+    const message = `the set has ${unlike} kinds of places; accepted: up to ${MOST_UNLIKE_PLACES}`;
+    return [{ path: 'placeIds', code: 'too-many-places', message }];
   }
   const ids = places.map(({ placeId }) => placeId);
   return strangers('placeIds', asked, ids, 'no place of the set has the id');

@@ -51,7 +51,10 @@ export class StudiesService {
     await this.access.forChanging(member, productionId, setId);
     const document = await this.document(member, productionId, setId, dto);
     const crowd = await this.populations.crowd(member.workshopId, dto.populationId);
-    const question = readQuestion(dto, document, crowd, this.config.studyBlockPeople);
+    const question = readQuestion(dto, document, crowd, {
+      blockPeople: this.config.studyBlockPeople,
+      ruleVersion: this.counter.ruleBook.version,
+    });
     const study = this.begun(member, setId, dto, question);
     const atOnce = study.blocks === 1 && estimatedMs(question) <= this.config.studyAtOnceMs;
     const id = atOnce
@@ -128,9 +131,8 @@ export class StudiesService {
   }
 
   private begun(member: MemberInfo, setId: string, dto: StartStudyDto, question: StudyQuestion): Study {
-    const { population } = crowdFrom(question.crowd);
-    const { name, kind, source, licence, cautions } = population;
-    const { womenShare, people, seed } = question;
+    const { name, kind, source, licence, cautions } = crowdFrom(question.crowd);
+    const { womenShare, people, seed, ruleVersion } = question;
     return this.studies.create({
       setId,
       draftNumber: dto.draftNumber ?? null,
@@ -141,7 +143,7 @@ export class StudiesService {
       seed,
       ruleIds: dto.ruleIds ?? null,
       placeIds: dto.placeIds ?? null,
-      ruleVersion: this.counter.ruleBook.version,
+      ruleVersion,
       state: 'queued',
       blocks: blocksOf(question),
       blocksDone: 0,
@@ -155,7 +157,7 @@ export class StudiesService {
   }
 
   private async countNow(member: MemberInfo, study: Study, question: StudyQuestion): Promise<string> {
-    const result = resultOf([this.counter.count(question, 0)], this.counter.crowdOf(question));
+    const result = resultOf([this.counter.count(question, 0)], question, this.counter.crowdOf(question));
     const done = { state: 'done', blocksDone: 1, question: null, result, outcome: result.all } as const;
     return this.studies.manager.transaction(async (manager) => {
       const { id } = await manager.save(Object.assign(study, done, { endedAt: new Date() }));
@@ -165,18 +167,8 @@ export class StudiesService {
   }
 
   private async enqueue(member: MemberInfo, study: Study, question: StudyQuestion): Promise<string> {
-    const unfinished = await this.studies
-      .createQueryBuilder('study')
-      .innerJoin('study.set', 'set')
-      .innerJoin('set.production', 'production')
-      .where('production.workshopId = :workshopId', { workshopId: member.workshopId })
-      .andWhere({ state: In([...UNFINISHED]) })
-      .getCount();
-    if (unfinished >= MOST_UNFINISHED) {
-      const detail = `${unfinished} studies of this workshop are not done yet; accepted: up to ${MOST_UNFINISHED} at a time.`;
-      throw Problem.conflict('too-many-studies', detail);
-    }
     return this.studies.manager.transaction(async (manager) => {
+      await refuseTooMany(manager, member.workshopId);
       const { id, blocks } = await manager.save(study);
       await this.queue.add(manager, id, blocks);
       await this.record(manager, member, 'study.started', id, { people: question.people });
@@ -203,4 +195,19 @@ export class StudiesService {
     const subject = { subjectType: 'study', subjectId, ...(detail ? { detail } : {}) };
     return this.audit.record(manager, { workshopId, userId, action, ...subject });
   }
+}
+
+/** Part of the caller's transaction. Who starts a study keeps the workshop, so that two at once are counted one by one. */
+async function refuseTooMany(manager: EntityManager, workshopId: string): Promise<void> {
+  await manager.query('SELECT 1 FROM workshops WHERE id = $1 FOR NO KEY UPDATE', [workshopId]);
+  const unfinished = await manager
+    .createQueryBuilder(Study, 'study')
+    .innerJoin('study.set', 'set')
+    .innerJoin('set.production', 'production')
+    .where('production.workshopId = :workshopId', { workshopId })
+    .andWhere({ state: In([...UNFINISHED]) })
+    .getCount();
+  if (unfinished < MOST_UNFINISHED) return;
+  const detail = `${unfinished} studies of this workshop are not done yet; accepted: up to ${MOST_UNFINISHED} at a time.`;
+  throw Problem.conflict('too-many-studies', detail);
 }

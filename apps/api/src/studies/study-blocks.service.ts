@@ -38,6 +38,7 @@ export class StudyBlocks {
       const all = await manager.findBy(StudyBlock, { studyId });
       const result = resultOf(
         all.map((one) => one.counts),
+        study.question,
         studyCrowd(study.question),
       );
       const ended = { state: 'done', blocksDone, result, outcome: result.all } as const;

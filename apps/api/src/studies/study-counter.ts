@@ -1,7 +1,6 @@
-import { loadRuleBook, type PartialStudy, type RuleBook } from '@settlewright/anthropometry';
+import { loadRuleBook, type PartialStudy, type Population, type RuleBook } from '@settlewright/anthropometry';
 import { Injectable } from '@nestjs/common';
 import { readSeedData } from '../common/seed-data';
-import type { Crowd } from '../populations/crowd';
 import { countBlock } from './count-block';
 import { studyCrowd, type StudyQuestion } from './study-question';
 
@@ -9,13 +8,23 @@ import { studyCrowd, type StudyQuestion } from './study-question';
 @Injectable()
 export class StudyCounter {
   readonly ruleBook: RuleBook = loadRuleBook(readSeedData('fit-rules'));
-  private last: { key: string; crowd: Crowd } | undefined;
+  private last: { key: string; crowd: Population } | undefined;
 
+  /** @throws Error when the study was begun with other rules: its blocks would not add up */
   count(question: StudyQuestion, block: number): PartialStudy {
+    const otherRules = this.otherRules(question);
+    if (otherRules) throw new Error(otherRules);
     return countBlock(question, this.crowdOf(question), this.ruleBook, block);
   }
 
-  crowdOf(question: Pick<StudyQuestion, 'crowd' | 'womenShare'>): Crowd {
+  /** Says that a study was begun with another version of the rules; nothing when it was this one. */
+  otherRules({ ruleVersion }: Pick<StudyQuestion, 'ruleVersion'>): string | undefined {
+    const own = this.ruleBook.version;
+    if (ruleVersion === own) return undefined;
+    return `It was begun with version ${ruleVersion} of the fit rules, and version ${own} is in use now: count it again.`;
+  }
+
+  crowdOf(question: Pick<StudyQuestion, 'crowd' | 'womenShare'>): Population {
     const key = `${question.crowd.id} ${question.womenShare ?? ''}`;
     if (this.last?.key !== key) this.last = { key, crowd: studyCrowd(question) };
     return this.last.crowd;

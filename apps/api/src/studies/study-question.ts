@@ -1,17 +1,20 @@
-import { mixOf, type PlaceSituation, type StudyShares, type Ticked } from '@settlewright/anthropometry';
-import type { Crowd } from '../populations/crowd';
+import {
+  CROWD_WEAR,
+  mixOf,
+  type PlaceSituation,
+  type Population,
+  type StudyShares,
+  type Ticked,
+} from '@settlewright/anthropometry';
 import { type CrowdData, crowdFrom } from '../populations/crowd-data';
 
 /** What people of a study wear; the same for everybody. */
-const SHOE_MM = 25;
-const CLOTHING = 'light' as const;
-export const STUDY_WEAR = {
-  women: { shoeMm: SHOE_MM, clothing: CLOTHING },
-  men: { shoeMm: SHOE_MM, clothing: CLOTHING },
-};
+export const STUDY_WEAR = { women: CROWD_WEAR, men: CROWD_WEAR };
 
 /** All that a block is counted from. Frozen when the study begins: drafts and populations may change meanwhile. */
 export interface StudyQuestion {
+  /** Version of the fit rules that everybody counts with. */
+  ruleVersion: string;
   crowd: CrowdData;
   /** Share of women, 0 to 1; absent for a population of one sex. */
   womenShare?: number;
@@ -31,10 +34,7 @@ export const blocksOf = ({ people, blockPeople }: Pick<StudyQuestion, 'people' |
   Math.ceil(people / blockPeople);
 
 /** The people, mixed as asked. */
-export function studyCrowd({ crowd, womenShare }: Pick<StudyQuestion, 'crowd' | 'womenShare'>): Crowd {
-  const { population, ...rest } = crowdFrom(crowd);
-  return {
-    population: womenShare === undefined ? population : mixOf(population, population, womenShare),
-    ...rest,
-  };
+export function studyCrowd({ crowd, womenShare }: Pick<StudyQuestion, 'crowd' | 'womenShare'>): Population {
+  const population = crowdFrom(crowd);
+  return womenShare === undefined ? population : mixOf(population, population, womenShare);
 }

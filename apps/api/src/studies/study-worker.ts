@@ -67,10 +67,10 @@ export class StudyWorker implements OnApplicationBootstrap, OnModuleDestroy {
     if (!job) return false;
     const { studyId, block } = job;
     this.logger.error(`block ${block} of study ${studyId} given up`);
-    await this.blocks.fail(
-      studyId,
-      `Block ${block + 1} could not be counted, though it was tried several times.`,
-    );
+    const question = await this.blocks.question(studyId, block);
+    const otherRules = question && this.counter.otherRules(question);
+    const tried = `Block ${block + 1} could not be counted, though it was tried several times.`;
+    await this.blocks.fail(studyId, otherRules ?? tried);
     await this.queue.settleGivenUp(job);
     return true;
   }

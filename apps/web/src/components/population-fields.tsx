@@ -1,5 +1,5 @@
 import { useId } from 'react';
-import { CROWDS, DEFAULT_CROWD, type CrowdChoice, type CrowdOption } from '@/lib/crowd/crowds.ts';
+import { CROWDS, DEFAULT_CROWD, onlySex, type CrowdChoice, type CrowdOption } from '@/lib/crowd/crowds.ts';
 import { Combobox } from './combobox.tsx';
 
 interface PopulationFieldsProps {
@@ -9,10 +9,9 @@ interface PopulationFieldsProps {
   onChange: (crowd: CrowdChoice) => void;
 }
 
-/** Whom a share is about: a population, and how many of 100 are women. */
+/** Whom a share is about: a population, and how many of 100 are women where it holds both. */
 export function PopulationFields({ crowd, own = [], onChange }: PopulationFieldsProps) {
   const { populationId, women } = crowd;
-  const id = useId();
   return (
     <div className="grid gap-4 phone:grid-cols-2">
       <Combobox
@@ -21,26 +20,35 @@ export function PopulationFields({ crowd, own = [], onChange }: PopulationFields
         choices={[...own, ...CROWDS].map((one) => ({ id: one.id, words: one.words, detail: one.kind }))}
         onChange={(chosen) => onChange({ women, populationId: chosen ?? DEFAULT_CROWD.populationId })}
       />
-      <div className="min-w-0">
-        <label htmlFor={id} className="mb-1 block text-sm font-medium">
-          Women of 100 people
-        </label>
-        <div className="flex h-12 items-center gap-4">
-          <input
-            id={id}
-            type="range"
-            min={0}
-            max={100}
-            step={5}
-            value={women}
-            aria-valuetext={mixWords(women)}
-            onChange={(event) => onChange({ populationId, women: Number(event.target.value) })}
-            className="h-6 min-w-0 flex-1 accent-(--color-chalk)"
-          />
-          <output htmlFor={id} className="w-9 text-right font-semibold">
-            {women}
-          </output>
-        </div>
+      {onlySex(populationId) === undefined && (
+        <MixField women={women} onChange={(mix) => onChange({ populationId, women: mix })} />
+      )}
+    </div>
+  );
+}
+
+function MixField({ women, onChange }: { women: number; onChange: (women: number) => void }) {
+  const id = useId();
+  return (
+    <div className="min-w-0">
+      <label htmlFor={id} className="mb-1 block text-sm font-medium">
+        Women of 100 people
+      </label>
+      <div className="flex h-12 items-center gap-4">
+        <input
+          id={id}
+          type="range"
+          min={0}
+          max={100}
+          step={5}
+          value={women}
+          aria-valuetext={mixWords(women)}
+          onChange={(event) => onChange(Number(event.target.value))}
+          className="h-6 min-w-0 flex-1 accent-(--color-chalk)"
+        />
+        <output htmlFor={id} className="w-9 text-right font-semibold">
+          {women}
+        </output>
       </div>
     </div>
   );

@@ -61,6 +61,7 @@ export function mixPopulations(parts: readonly MixPart[]): Population {
       licence: each(({ licence }) => licence).join('; '),
       cautions: [...new Set(populations.flatMap(({ cautions }) => cautions))],
       read: new Set(MEASURE_KEYS.filter((key) => populations.every(({ read }) => read.has(key)))),
+      surveyed: surveyedOf(taken),
     },
     taken.flatMap(({ population, share }) =>
       population.parts.map((part) => ({ ...part, share: part.share * share })),
@@ -95,8 +96,14 @@ export function onlyOf(population: Population, group: SurveyGroup): Population {
   if (whole === 0)
     throw new RangeError(`${population.name} has no ${group}; accepted: a population that has`);
   const parts = population.parts.filter(({ bodies }) => bodies.group === group);
+  const people = population.surveyed?.[group];
   return populationOf(
-    { ...population, id: `${population.id}-${group}`, name: `${population.name}, ${group}` },
+    {
+      ...population,
+      id: `${population.id}-${group}`,
+      name: `${population.name}, ${group}`,
+      ...(people === undefined ? {} : { surveyed: { [group]: people } }),
+    },
     parts.map((part) => ({ ...part, share: part.share / whole })),
   );
 }
@@ -105,6 +112,25 @@ const shareOf = (parts: readonly PopulationPart[], group: SurveyGroup): number =
   parts.reduce((sum, { share, bodies }) => sum + (bodies.group === group ? share : 0), 0);
 
 const percent = (share: number): string => `${Number((100 * share).toFixed(1))} %`;
+
+/**
+ * People of each sex who count as measured, where every part tells its number: of parts with the weights w and n people
+ * as many as give a share the same variance, 1 / sum of w² / n.
+ */
+function surveyedOf(taken: readonly MixPart[]): Partial<Record<SurveyGroup, number>> {
+  const counts = (['women', 'men'] as const).map((group) => {
+    const own = taken
+      .map(({ population, share }) => ({
+        weight: share * shareOf(population.parts, group),
+        people: population.surveyed?.[group] ?? Infinity,
+      }))
+      .filter(({ weight }) => weight > 0);
+    const whole = own.reduce((sum, { weight }) => sum + weight, 0);
+    const variance = own.reduce((sum, { weight, people }) => sum + (weight / whole) ** 2 / people, 0);
+    return [group, own.every(({ people }) => people < Infinity) ? 1 / variance : Infinity] as const;
+  });
+  return Object.fromEntries(counts.filter(([, people]) => people < Infinity));
+}
 
 /** What a mix rests on is what its weakest part rests on. */
 const WORST_FIRST: readonly PopulationKind[] = ['estimated', 'generated', 'own', 'survey'];

@@ -24,6 +24,8 @@ export interface PopulationDetails {
   cautions: readonly string[];
   /** Measures that were read in the source for every group; the other known ones are estimated. */
   read: ReadonlySet<MeasureKey>;
+  /** People of each sex that were measured, where they are known; they widen the range of a share. */
+  surveyed?: Partial<Record<SurveyGroup, number>>;
 }
 
 /** Writes one person's values; made for certain columns. */

@@ -3,7 +3,7 @@ import { ansur2 } from '../../test/seed.ts';
 import { momentsOf } from '../../test/shares.ts';
 import { MEASURE_KEYS, type MeasureKey } from '../measures/measures.ts';
 import { completeSummary } from './complete-summary.ts';
-import { onlyOf } from './mix.ts';
+import { mixOf, mixPopulations, onlyOf } from './mix.ts';
 import { summarise } from './summarise.ts';
 import { ownPopulation, soldiers2012 } from './survey-population.ts';
 import { readSurvey } from './survey.ts';
@@ -34,6 +34,19 @@ describe('a survey of one’s own', () => {
     expect(own.kind).toBe('own');
     expect(own.read).toEqual(new Set(measured));
     expect(own.known).toEqual(new Set(MEASURE_KEYS));
+  });
+
+  it('tells how many were measured, also where it is mixed with others', () => {
+    expect(own.surveyed).toEqual({ women: 600, men: 600 });
+    expect(soldiers.surveyed).toEqual({ women: 1986, men: 4082 });
+    expect(mixOf(own, soldiers, 0.3).surveyed).toEqual({ women: 600, men: 4082 });
+    expect(onlyOf(own, 'men').surveyed).toEqual({ men: 600 });
+    // Half of either: 1 / (0.25/600 + 0.25/1986) women.
+    const both = [own, soldiers].map((population) => ({ population, share: 0.5 }));
+    expect(mixPopulations(both).surveyed?.women).toBeCloseTo(1843, 0);
+    const { surveyed: _, ...untold } = soldiers;
+    const half = [own, untold].map((population) => ({ population, share: 0.5 }));
+    expect(mixPopulations(half).surveyed).toEqual({});
   });
 
   it.each(['women', 'men'] as const)('has the means and spreads of the %s measured', (group) => {

@@ -75,9 +75,9 @@ export function ownPopulation(survey: Survey, named: OwnSurvey): Population {
   return surveyPopulation(survey, { ...named, kind: 'own', cautions });
 }
 
-function surveyPopulation(survey: Survey, details: Omit<PopulationDetails, 'read'>): Population {
+function surveyPopulation(survey: Survey, details: Omit<PopulationDetails, 'read' | 'surveyed'>): Population {
   return populationOf(
-    { ...details, read: survey.read },
+    { ...details, read: survey.read, ...(survey.surveyed ? { surveyed: survey.surveyed } : {}) },
     (['women', 'men'] as const).map((group) => ({
       share: 0.5,
       bodies: workedBodies(group, survey.worked[group], survey.stats[group]),

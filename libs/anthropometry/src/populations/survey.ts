@@ -26,6 +26,8 @@ export interface Survey {
   correlations: Record<SurveyGroup, readonly (readonly number[])[]>;
   /** Measures that were read in the source; the others were estimated from them. */
   read: ReadonlySet<MeasureKey>;
+  /** People of each sex that were measured; absent where the source does not say. */
+  surveyed?: Record<SurveyGroup, number>;
   /** Multivariate normal of the worked values. */
   worked: Record<SurveyGroup, Worked>;
   /** How the spread grows with weight; absent where nobody fitted it. */
@@ -65,6 +67,7 @@ const perGroup = <T extends z.ZodType>(schema: T) => z.object({ men: schema, wom
 const measureKey = z.enum(MEASURE_KEYS);
 const pair = z.tuple([z.number(), z.number()]);
 const logBlock = z.object({
+  n: z.number().int().positive().optional(),
   mean: z.array(z.number()),
   sd: z.array(z.number().positive()),
   corr: z.array(z.number().min(-1).max(1)),
@@ -151,6 +154,7 @@ export function readSurvey(summary: unknown): Survey {
     stats,
     correlations,
     read: new Set(parsed.data.read ?? measures),
+    ...(log?.women.n && log.men.n ? { surveyed: { women: log.women.n, men: log.men.n } } : {}),
     worked: { men: worked('men'), women: worked('women') },
     ...(spread ? { spread: spread } : {}),
     ...(ageShift ? { ageShift } : {}),

@@ -60,7 +60,7 @@ export function checkSurvey(file: SurveyFile, mapping: Mapping): CheckedSurvey {
 export function summaryOf({ people }: CheckedSurvey, source: string): WholeSummary {
   const whole = completeSummary(summarise(people, source), referenceSurvey());
   // What cannot be drawn from is refused now and not when it is studied.
-  crowdFrom({ kind: 'own', id: '', name: '', source, summary: whole }).population.draw(1, 1);
+  crowdFrom({ kind: 'own', id: '', name: '', source, summary: whole }).draw(1, 1);
   return whole;
 }
 

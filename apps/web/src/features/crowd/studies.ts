@@ -1,7 +1,7 @@
 import { useMutation, useQuery, useQueryClient } from '@tanstack/react-query';
 import { api } from '@/lib/api-client.ts';
 import type { ServerStudy } from '@/lib/contract.ts';
-import type { CrowdChoice } from '@/lib/crowd/crowds.ts';
+import { onlySex, type CrowdChoice } from '@/lib/crowd/crowds.ts';
 
 /** People of a study on the server. */
 export const MILLION = 1_000_000;
@@ -39,7 +39,7 @@ export const useStartStudy = (setAt: string) =>
   useStudyMutation(setAt, ({ crowd, draftNumber, ruleIds }: StartInput) =>
     api.post(`${setAt}/studies`, {
       populationId: crowd.populationId,
-      womenPercent: crowd.women,
+      ...(onlySex(crowd.populationId) ? {} : { womenPercent: crowd.women }),
       people: MILLION,
       draftNumber,
       ...(ruleIds ? { ruleIds } : {}),

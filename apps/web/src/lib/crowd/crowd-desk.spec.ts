@@ -69,12 +69,32 @@ describe('a crowd that is asked', () => {
   });
 
   it('knows every population in the list by its own name, and no other', async () => {
-    for (const { id } of CROWDS) expect((await peopleOf({ populationId: id, women: 50 })).id).toContain(id);
+    for (const { id, only } of CROWDS) {
+      const people = await peopleOf({ populationId: id, women: 50 });
+      expect(people.id).toContain(id);
+      expect(people.groups.map(({ group }) => group)).toEqual(only ? [only] : ['women', 'men']);
+    }
     await expect(peopleOf({ populationId: 'giants', women: 50 })).rejects.toThrow('giants');
   });
 });
 
+describe('the range of a share', () => {
+  it('counts in how few were measured, as the server does', async () => {
+    const crowd = { populationId: 'us-soldiers-2012', women: 0 };
+    const { all } = await createCrowdDesk().answer('shares', { ...ask(0), crowd, places: placesAt(440) });
+    if (all.kind !== 'shares') throw new Error(`no shares: ${all.kind}`);
+    const { value, low, high } = all.fits.mixed;
+    // 4,000 drawn after 4,082 surveyed men.
+    const expected = 2 * 1.96 * Math.sqrt(value * (1 - value) * (1 / 4000 + 1 / 4082));
+    expect((high - low) / expected).toBeCloseTo(1, 1);
+  });
+});
+
 describe('words for a crowd', () => {
+  it('names the one sex that a population holds, whatever the mix', () => {
+    expect(crowdWords({ populationId: 'german', women: 50 })).toBe('German adults, men');
+  });
+
   it.each([
     [50, 'US adults 2015–16, men and women equally'],
     [0, 'US adults 2015–16, men'],

@@ -62,7 +62,14 @@ export function createCrowdDesk(): CrowdDesk {
     const key = `${people.population.id} ${count} ${lensHeightMm ?? ''}`;
     if (last?.key !== key) {
       const wear = { women: CROWD_WEAR, men: CROWD_WEAR };
-      const setup = { places, ruleBook: book, wear, ...(lensHeightMm === undefined ? {} : { lensHeightMm }) };
+      const { surveyed = {} } = people.population;
+      const setup = {
+        places,
+        ruleBook: book,
+        wear,
+        surveyed,
+        ...(lensHeightMm === undefined ? {} : { lensHeightMm }),
+      };
       last = { key, study: createStudy(people.draws, setup) };
     } else last.study.move(places);
     last.study.tick(ticked ?? {});

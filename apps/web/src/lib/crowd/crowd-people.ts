@@ -1,12 +1,8 @@
 import {
-  childrenOfMark,
-  civilians2015,
+  builtInPopulations,
   mixOf,
-  nationalPopulations,
   ownPopulation,
-  readChildren,
   readSurvey,
-  soldiers2012,
   type Population,
 } from '@settlewright/anthropometry';
 import type { CrowdChoice } from './crowds.ts';
@@ -25,9 +21,29 @@ export interface CrowdRequest extends CrowdChoice {
   own?: OwnCrowd;
 }
 
-async function readSurveyOfSoldiers() {
-  const summary = await import('@settlewright/seed-data/populations/ansur2.json');
-  return readSurvey(summary.default);
+let shipped: Promise<ReadonlyMap<string, Population>> | undefined;
+
+/** Read when first asked for, and then kept. */
+function shippedPopulations(): Promise<ReadonlyMap<string, Population>> {
+  shipped ??= Promise.all([
+    import('@settlewright/seed-data/populations/ansur2.json'),
+    import('@settlewright/seed-data/populations/civilian-2015.json'),
+    import('@settlewright/seed-data/populations/nations.json'),
+    import('@settlewright/seed-data/populations/children.json'),
+  ]).then(
+    ([ansur2, civilian, nations, children]) =>
+      builtInPopulations({
+        ansur2: ansur2.default,
+        civilian: civilian.default,
+        nations: nations.default,
+        children: children.default,
+      }),
+    (fault: unknown) => {
+      shipped = undefined;
+      throw fault;
+    },
+  );
+  return shipped;
 }
 
 async function populationOf({ populationId, own }: CrowdRequest): Promise<Population> {
@@ -35,19 +51,7 @@ async function populationOf({ populationId, own }: CrowdRequest): Promise<Popula
     const { id, name, source, summary } = own;
     return ownPopulation(readSurvey(summary), { id, name, source, licence: 'the workshop’s own' });
   }
-  if (populationId === 'us-civilians-2015') {
-    const file = await import('@settlewright/seed-data/populations/civilian-2015.json');
-    return civilians2015(file.default);
-  }
-  const mark = /^children-(\d)$/.exec(populationId)?.[1];
-  if (mark) {
-    const file = await import('@settlewright/seed-data/populations/children.json');
-    return childrenOfMark(readChildren(file.default), Number(mark));
-  }
-  const survey = await readSurveyOfSoldiers();
-  if (populationId === 'us-soldiers-2012') return soldiers2012(survey);
-  const file = await import('@settlewright/seed-data/populations/nations.json');
-  const found = nationalPopulations(file.default, survey).find(({ id }) => id === populationId);
+  const found = (await shippedPopulations()).get(populationId);
   if (!found) throw new Error(`There is no population “${populationId}”.`);
   return found;
 }

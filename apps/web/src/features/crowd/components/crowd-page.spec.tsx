@@ -115,6 +115,22 @@ describe('who fits', () => {
     await waitFor(() => expect(screen.queryByRole('progressbar')).toBeNull());
   });
 
+  it('sends no mix, and shows none, for a population of one sex', async () => {
+    const sent: unknown[] = [];
+    server.use(
+      http.post('*/sets/1/studies', async ({ request }) => {
+        sent.push(await request.json());
+        return HttpResponse.json({}, { status: 201 });
+      }),
+    );
+    const { user } = show(bay, '?people=german');
+    await user.click(await screen.findByRole('button', { name: 'Count a million' }, COUNTED));
+    await waitFor(() =>
+      expect(sent).toEqual([{ populationId: 'german', people: 1_000_000, draftNumber: 41 }]),
+    );
+    expect(screen.queryByRole('slider')).toBeNull();
+  });
+
   it('shows what was counted to a reader, without a button', async () => {
     signInAs('reviewer');
     studies = [
