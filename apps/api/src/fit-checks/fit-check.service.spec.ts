@@ -86,3 +86,24 @@ describe('fit sheets made on the server', () => {
     expect(Object.keys(body!.means).sort()).toEqual([...read].map(String).sort());
   });
 });
+
+describe('what to measure next', () => {
+  it('is worked out anew for so many at once; of the others it is said how many, and they follow', async () => {
+    const other = { ...HETTY, id: '00000000-0000-4000-8000-000000000002' };
+    const seated = [HETTY, other].map(({ id }) => ({ kind: 'cast' as const, castId: id }));
+    const ask = async (document: SetDocument) => {
+      const turns = { left: 1, leftOut: 0 };
+      const found: string[] = [];
+      for await (const { castId } of fit.measureNext(document, [HETTY, other], null, turns))
+        found.push(castId);
+      return { found, ...turns };
+    };
+    const document = withSitters(...seated);
+    expect(await ask(document)).toEqual({ found: [HETTY.id], left: 0, leftOut: 1 });
+    expect(await ask(document)).toEqual({ found: [HETTY.id, other.id], left: 0, leftOut: 0 });
+    expect(await ask(document)).toEqual({ found: [HETTY.id, other.id], left: 1, leftOut: 0 });
+    // Another set is another question.
+    const changed = { ...document, asked: { ...document.asked, lensHeightMm: 1200 } };
+    expect(await ask(changed)).toEqual({ found: [HETTY.id], left: 0, leftOut: 1 });
+  });
+});

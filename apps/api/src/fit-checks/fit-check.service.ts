@@ -15,6 +15,7 @@ import { measureSet, type SetDocument, type SitterRef } from '@settlewright/geom
 import { Injectable } from '@nestjs/common';
 import type { CastPerson } from '../cast/known-person';
 import { readSeedData } from '../common/seed-data';
+import { digest, RecentAnswers } from './recent-answers';
 import { type RoundedBody, roundedBody } from './rounded-body';
 
 const ORDINALS = new Intl.PluralRules('en', { type: 'ordinal' });
@@ -28,11 +29,20 @@ export interface SitterNext {
   next: NextMeasures;
 }
 
+/** How many people may be worked out anew for one request, and how many were not for want of turns. */
+export interface Turns {
+  left: number;
+  leftOut: number;
+}
+
+const RECENT = 500;
+
 /** Makes fit sheets on the server, so that verdicts can be shown to people who may not see measures. */
 @Injectable()
 export class FitCheckService {
   readonly ruleBook: RuleBook = loadRuleBook(readSeedData('fit-rules'));
   private readonly model: BodyModel = createBodyModel(readSeedData('populations/ansur2'));
+  private readonly recent = new RecentAnswers<NextMeasures>(RECENT);
 
   /** `confidence` is what the workshop asks of a verdict; null: as much as the rule book does. */
   sheetFor(document: SetDocument, cast: readonly CastPerson[], confidence: number | null): FitSheet {
@@ -47,25 +57,37 @@ export class FitCheckService {
 
   /**
    * What to measure next of everyone of the cast who sits in the document. Each person takes some tenths of a second,
-   * so others get their turn between two of them.
+   * so others get their turn between two of them, and what was worked out lately costs no turn.
    */
   async *measureNext(
     document: SetDocument,
     cast: readonly CastPerson[],
     confidence: number | null,
+    turns: Turns,
   ): AsyncGenerator<SitterNext> {
     const { ruleBook, model } = this;
     const settings = { ...document.asked, ...(confidence === null ? {} : { confidence }) };
     const input = { situation: measureSet(document), ruleBook, model, settings };
+    const asked = digest([document, confidence]);
     for (const sitter of this.sitters(document, cast)) {
       if (sitter.kind !== 'cast') continue;
-      await setImmediate();
-      const next = nextMeasures({
-        person: sitter.person,
-        model,
-        rowFor: (person) => checkSitter(input, { ...sitter, person }),
-        confidence: confidence ?? ruleBook.confidence,
-      });
+      const key = digest([asked, sitter.placeId, sitter.person]);
+      let next = this.recent.get(key);
+      if (!next) {
+        if (turns.left === 0) {
+          turns.leftOut += 1;
+          continue;
+        }
+        turns.left -= 1;
+        await setImmediate();
+        next = nextMeasures({
+          person: sitter.person,
+          model,
+          rowFor: (person) => checkSitter(input, { ...sitter, person }),
+          confidence: confidence ?? ruleBook.confidence,
+        });
+        this.recent.set(key, next);
+      }
       yield { castId: sitter.id, placeId: sitter.placeId, next };
     }
   }

@@ -2864,6 +2864,8 @@ export interface components {
         MeasureNextDto: {
             /** @description one entry for everybody of the cast who sits */
             items: components["schemas"]["PersonNextDto"][];
+            /** @description taken places that were not looked at, as there are too many for one answer; ask again for more */
+            leftOut: number;
         };
         ProblemBody: {
             type: string;

@@ -9,7 +9,10 @@ import { SetsService } from '../../sets/sets.service';
 import { CastService } from '../cast.service';
 import type { CastMember } from '../entities/cast-member.entity';
 import { castPerson } from '../known-person';
-import type { PersonNextDto } from './dto/measure-next.dto';
+import type { MeasureNextDto, PersonNextDto } from './dto/measure-next.dto';
+
+/** Places worked out anew for one request: some ten seconds of work. What was worked out lately is not counted. */
+const MOST_PLACES = 40;
 
 interface NamedDocument {
   name: string;
@@ -29,20 +32,20 @@ export class MeasureNextService {
   ) {}
 
   /** Of everybody who sits in one set. */
-  async ofSet(member: MemberInfo, productionId: string, setId: string): Promise<PersonNextDto[]> {
+  async ofSet(member: MemberInfo, productionId: string, setId: string): Promise<MeasureNextDto> {
     const { name } = await this.access.forReading(member, productionId, setId);
     const { document } = await this.drafts.get(member, productionId, setId);
     return this.of(productionId, [{ name, document }], await this.cast.all(member, productionId));
   }
 
   /** Of everybody, over all sets in use that they sit in. */
-  async ofProduction(member: MemberInfo, productionId: string): Promise<PersonNextDto[]> {
+  async ofProduction(member: MemberInfo, productionId: string): Promise<MeasureNextDto> {
     const people = await this.cast.all(member, productionId);
     return this.ofPeople(productionId, people);
   }
 
   /** Of some people of a production that the caller may see. */
-  async ofPeople(productionId: string, people: readonly CastMember[]): Promise<PersonNextDto[]> {
+  async ofPeople(productionId: string, people: readonly CastMember[]): Promise<MeasureNextDto> {
     return this.of(productionId, await this.sets.inUse(productionId), people);
   }
 
@@ -50,18 +53,21 @@ export class MeasureNextService {
     productionId: string,
     sets: readonly NamedDocument[],
     people: readonly CastMember[],
-  ): Promise<PersonNextDto[]> {
+  ): Promise<MeasureNextDto> {
     const { confidence } = await this.productions.workshopOf(productionId);
     const found = new Map<string, PersonNextDto>();
+    const turns = { left: MOST_PLACES, leftOut: 0 };
     for (const { name, document } of sets) {
-      for await (const sitter of this.fit.measureNext(document, people.map(castPerson), confidence)) {
+      const sitters = this.fit.measureNext(document, people.map(castPerson), confidence, turns);
+      for await (const sitter of sitters) {
         add(found, name, sitter);
       }
     }
-    return [...found.values()].map((person) => ({
+    const items = [...found.values()].map((person) => ({
       ...person,
       order: person.order.toSorted((a, b) => b.settles - a.settles),
     }));
+    return { items, leftOut: turns.leftOut };
   }
 }
 

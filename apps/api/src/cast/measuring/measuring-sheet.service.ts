@@ -33,7 +33,7 @@ export class MeasuringSheetService {
       throw Problem.conflict('nobody-to-measure', 'There is nobody in this production to measure yet.');
     }
     const workshop = await this.workshops.get(member.workshopId);
-    const found = await this.next.ofPeople(productionId, people);
+    const { items: found } = await this.next.ofPeople(productionId, people);
     const content = measuringSheetPdf({
       people: people.map((person) => ({ person, next: found.find((one) => one.castId === person.id) })),
       ruleBook: this.fit.ruleBook,

@@ -29,11 +29,11 @@ export class MeasuringController {
     type: MeasureNextDto,
     description: 'which tape measures settle most, over all sets in use that each person sits in',
   })
-  async ofProduction(
+  ofProduction(
     @Member() member: MemberInfo,
     @IdParam('productionId') productionId: string,
   ): Promise<MeasureNextDto> {
-    return { items: await this.next.ofProduction(member, productionId) };
+    return this.next.ofProduction(member, productionId);
   }
 
   @Get('sets/:setId/draft/measure-next')
@@ -41,12 +41,12 @@ export class MeasuringController {
     type: MeasureNextDto,
     description: 'which tape measures settle most of what the draft’s fit sheet does not know',
   })
-  async ofSet(
+  ofSet(
     @Member() member: MemberInfo,
     @IdParam('productionId') productionId: string,
     @IdParam('setId') setId: string,
   ): Promise<MeasureNextDto> {
-    return { items: await this.next.ofSet(member, productionId, setId) };
+    return this.next.ofSet(member, productionId, setId);
   }
 
   @Get('cast/measuring-sheet.pdf')

@@ -27,4 +27,9 @@ export class PersonNextDto {
 export class MeasureNextDto {
   @ApiProperty({ type: [PersonNextDto], description: 'one entry for everybody of the cast who sits' })
   items: PersonNextDto[];
+  @ApiProperty({
+    description:
+      'taken places that were not looked at, as there are too many for one answer; ask again for more',
+  })
+  leftOut: number;
 }
