@@ -61,6 +61,33 @@ describe('choices judged', () => {
     expect(judging.counted).not.toContain('SEAT-05');
   });
 
+  it('names what the people have no measure for, and then gives no share', () => {
+    const { popliteal_height: _, ...columns } = draws.columns;
+    const withoutShins = judgeChoices(input, {
+      sitters,
+      ruleBook,
+      model,
+      crowd: { draws: { ...draws, columns }, wear },
+    });
+    expect(judging.unknown).toEqual([]);
+    expect(withoutShins.unknown).toContain('SEAT-02');
+    expect(withoutShins.unknown).not.toContain('SEAT-04');
+    expect(withoutShins.counted).not.toContain('SEAT-02');
+    expect(withoutShins.share).toBeUndefined();
+  });
+
+  it('names what nobody meets', () => {
+    const most = { ...free[0], dimensionId: height.id, step: 3, min: height.max - 10, max: height.max };
+    const high = height.at(height.max) as SetDocument;
+    const judged = judgeChoices(
+      { document: high, dimensions: dimensionsOf(high), free: [most] },
+      { sitters, ruleBook, model, crowd: { draws, wear } },
+    );
+    expect(judged.metByNobody).toContain('SEAT-02');
+    expect(judged.counted).not.toContain('SEAT-02');
+    expect(judging.metByNobody).not.toContain('SEAT-02');
+  });
+
   it('serves fewer of a crowd on seats far too high', () => {
     const high = documentAt(input, [height.value + 150]);
     const [now, then] = [judging.share?.(bay) ?? -1, high && judging.share?.(high)];

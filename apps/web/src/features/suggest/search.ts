@@ -38,8 +38,10 @@ export interface SearchTold {
   suggestion: Suggestion;
   /** Choices that were tried since it last spoke. */
   tried: Tried[];
-  /** Rules that the share counts at once. */
+  /** Rules that the share counts at once, that its people are not known by, and that nobody meets. */
   counted: string[];
+  unknown: string[];
+  metByNobody: string[];
   people?: CrowdTold;
   ended: boolean;
 }
@@ -87,7 +89,7 @@ export async function search(
   const { document, free, sitters, confidence, crowd, known } = asked;
   const [ground, people] = await Promise.all([fetchGround(), crowd ? drawn(crowd) : undefined]);
   const input = { document, dimensions: dimensionsOf(document), free };
-  const { counted, ...judging } = judgeChoices(input, {
+  const { counted, unknown, metByNobody, ...judging } = judgeChoices(input, {
     ...ground,
     sitters,
     settings: { confidence },
@@ -95,7 +97,8 @@ export async function search(
   });
   let tried: Tried[] = [];
   const tell = (suggestion: Suggestion, ended: boolean): void => {
-    speak({ suggestion, tried, counted, ...(people ? { people: people.told } : {}), ended });
+    const rules = { counted, unknown, metByNobody };
+    speak({ suggestion, tried, ...rules, ...(people ? { people: people.told } : {}), ended });
     tried = [];
   };
   const steps = suggestDimensions({ ...input, ...judging, known, onTried: (one) => tried.push(one) });

@@ -6,6 +6,7 @@ import { bay, check, INCHES, ruleBook } from './test/show-suggest.tsx';
 import {
   blameWords,
   dimensionWords,
+  publicWords,
   servedWords,
   shareWords,
   staysWords,
@@ -74,6 +75,17 @@ describe('words of a choice', () => {
   it('says shares as about so many of a hundred', () => {
     expect(shareWords(0.234, 0.002)).toBe('About 23 in 100, now fewer than 1 in 100');
     expect(shareWords(undefined, 0.2)).toBeUndefined();
+  });
+
+  it('says which checks a share leaves out, and gives none where one is not known', () => {
+    const say = (rules: Partial<Parameters<typeof publicWords>[0]>) =>
+      publicWords({ counted: [], unknown: [], metByNobody: [], ...rules }, (id) => id.toLowerCase());
+    expect(say({ counted: ['A', 'B'], metByNobody: ['C'] })).toMatch(
+      /^Counted at once: a and b\. Left out, for nobody was found to meet it in these ranges: c\. For every other check/,
+    );
+    expect(say({ counted: ['A'], unknown: ['D'] })).toMatch(/^No share is given: d cannot be told/);
+    expect(say({ counted: ['A'], unknown: ['D'] })).not.toContain('Counted');
+    expect(say({})).toBe('None of these dimensions was found to change the share that meets a check.');
   });
 
   it('offers a foot rail to whom the seat is too high for', () => {

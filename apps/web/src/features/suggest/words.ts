@@ -8,6 +8,7 @@ import {
   joinWords,
   markWords,
 } from '@/lib/dimension-words.ts';
+import type { SearchTold } from './search.ts';
 import { checkWords, shortCells, type Effects, type Move, type PersonEffect } from './effects.ts';
 
 /** How a dimension stands in the list: "Seat height, pressed: B1 to B4 with T1 and T2". */
@@ -76,6 +77,29 @@ export function shareWords(then: number | undefined, now: number | undefined): s
   if (then === undefined) return undefined;
   const before = now === undefined ? '' : `, now ${aboutInHundred(now)}`;
   return `${capital(aboutInHundred(then))}${before}`;
+}
+
+/** Which checks the share of the public counts, and which it leaves out and why. */
+export function publicWords(
+  { counted, unknown, metByNobody }: Pick<SearchTold, 'counted' | 'unknown' | 'metByNobody'>,
+  checkOf: (ruleId: string) => string,
+): string {
+  const named = (ruleIds: readonly string[]) => joinWords(ruleIds.map(checkOf));
+  const isNone = counted.length + unknown.length + metByNobody.length === 0;
+  return [
+    ...(unknown.length > 0
+      ? [
+          `No share is given: ${named(unknown)} cannot be told of these people, and these dimensions change it.`,
+        ]
+      : []),
+    ...(counted.length > 0 && unknown.length === 0 ? [`Counted at once: ${named(counted)}.`] : []),
+    ...(metByNobody.length > 0
+      ? [`Left out, for nobody was found to meet it in these ranges: ${named(metByNobody)}.`]
+      : []),
+    isNone
+      ? 'None of these dimensions was found to change the share that meets a check.'
+      : 'For every other check the share was the same wherever it was looked at: at present, at the ends of the ranges and half-way.',
+  ].join(' ');
 }
 
 /** Who or what stands in the way of an answer that serves all, and what would help. */

@@ -2,11 +2,11 @@ import type { Dimension, FreeDimension } from '@settlewright/geometry';
 import { useMemo } from 'react';
 import { Notice } from '@/components/notice.tsx';
 import { RuleHeading } from '@/components/rule-heading.tsx';
-import { dimensionValue, joinWords, sentence } from '@/lib/dimension-words.ts';
+import { dimensionValue, sentence } from '@/lib/dimension-words.ts';
 import { checkWords, effectsOf } from '../effects.ts';
 import type { SearchTold } from '../search.ts';
 import { useSuggestView } from '../suggest-view.ts';
-import { blameWords, stepWords } from '../words.ts';
+import { blameWords, publicWords, stepWords } from '../words.ts';
 import { AnswerSection } from './answer-section.tsx';
 import { KeepLook } from './keep-look.tsx';
 
@@ -25,7 +25,7 @@ interface SearchResultsProps {
 /** What the search found: up to three answers, who stands in the way, and keeping the look. */
 export function SearchResults({ told, dimensions, free, crowdName, isOver, onTaken }: SearchResultsProps) {
   const { document, check, ruleBook, style, replace } = useSuggestView();
-  const { suggestion, counted, people } = told;
+  const { suggestion, people } = told;
   const { answers, present, blame } = suggestion;
   // The same choices come with every message: only new ones are worked out.
   const key = answers.map(({ tried }) => tried.values.join(' ')).join('|');
@@ -85,9 +85,7 @@ export function SearchResults({ told, dimensions, free, crowdName, isOver, onTak
             The public
           </RuleHeading>
           <p className="text-sm text-ink-2">
-            {counted.length === 0
-              ? 'None of these dimensions changes a check of the public.'
-              : `Counted at once: ${joinWords(counted.map((id) => checkWords(ruleBook, id)))}. The other checks do not hang on these dimensions.`}{' '}
+            {publicWords(told, (id) => checkWords(ruleBook, id))}{' '}
             {[crowdName, people.source, ...people.cautions].map(sentence).join(' ')}
           </p>
         </section>

@@ -47,7 +47,11 @@ const FEW = 40;
 export function searchAtOnce(asked: SearchAsked): SearchTold {
   const tried: Tried[] = [];
   const input = { document: asked.document, dimensions: dimensionsOf(asked.document), free: asked.free };
-  const { counted, ...judging } = judgeChoices(input, { sitters: asked.sitters, ruleBook, model });
+  const { counted, unknown, metByNobody, ...judging } = judgeChoices(input, {
+    sitters: asked.sitters,
+    ruleBook,
+    model,
+  });
   const steps = suggestDimensions({
     ...input,
     ...judging,
@@ -57,7 +61,10 @@ export function searchAtOnce(asked: SearchAsked): SearchTold {
   });
   for (;;) {
     const step = steps.next();
-    if (step.done) return { suggestion: step.value satisfies Suggestion, tried, counted, ended: true };
+    if (step.done) {
+      const suggestion = step.value satisfies Suggestion;
+      return { suggestion, tried, counted, unknown, metByNobody, ended: true };
+    }
   }
 }
 
