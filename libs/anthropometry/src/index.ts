@@ -1,5 +1,6 @@
 export * from './measures/measures.ts';
 export * from './measures/measure-info.ts';
+export { contradictions } from './measures/orders.ts';
 export * from './people/person.ts';
 export { normalCdf, normalQuantile } from './people/normal.ts';
 export { bivariateNormalCdf } from './people/bivariate.ts';

@@ -1,4 +1,4 @@
-import { TAPE_MEASURE_KEYS } from '@settlewright/anthropometry';
+import { contradictions, TAPE_MEASURE_KEYS } from '@settlewright/anthropometry';
 import type { ProblemField } from '../common/problem';
 import { isStorableText } from '../common/text-field';
 import { DAY_WORDS, isPastDay } from './day';
@@ -39,7 +39,19 @@ export function readMeasured(sent: Record<string, unknown>): Read {
     if (faults.length > 0) fields.push(...faults);
     else value[key] = tapeMeasure(entry);
   }
+  fields.push(...contradictionsIn(value));
   return fields.length > 0 ? { ok: false, fields } : { ok: true, value };
+}
+
+function contradictionsIn(value: TapeMeasures): ProblemField[] {
+  const taken = Object.fromEntries(Object.entries(value).map(([key, { mm }]) => [key, mm]));
+  return contradictions(taken).map(({ shorter, longer }) => ({
+    path: `measured.${shorter}.mm`,
+    code: 'contradicts',
+    message:
+      `${TAPE_LIMITS[shorter].label} is less than ${TAPE_LIMITS[longer].label.toLowerCase()} in every body; ` +
+      `read ${taken[shorter]} and ${taken[longer]} mm`,
+  }));
 }
 
 function faultsOf(

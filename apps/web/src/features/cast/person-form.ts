@@ -1,4 +1,9 @@
-import { TAPE_MEASURE_KEYS, type TapeMeasureKey } from '@settlewright/anthropometry';
+import {
+  contradictions,
+  MEASURE_INFO,
+  TAPE_MEASURE_KEYS,
+  type TapeMeasureKey,
+} from '@settlewright/anthropometry';
 import { z } from 'zod';
 import { entryOf, type QuantityEntry } from '@/components/quantity-entry.ts';
 import type { CastMember, TapeReading } from '@/lib/contract.ts';
@@ -36,12 +41,24 @@ export const personFormSchema = z.object({
   notes: z.string().trim().max(4000, 'At most 4,000 characters.'),
   takenBy: z.string().trim().max(120, 'At most 120 characters.'),
   takenOn: z.string(),
-  measured: z.object(
-    Object.fromEntries(TAPE_MEASURE_KEYS.map((key) => [key, quantity])) as Record<
-      TapeMeasureKey,
-      typeof quantity
-    >,
-  ),
+  measured: z
+    .object(
+      Object.fromEntries(TAPE_MEASURE_KEYS.map((key) => [key, quantity])) as Record<
+        TapeMeasureKey,
+        typeof quantity
+      >,
+    )
+    .superRefine((entries, context) => {
+      const taken = Object.entries(entries).flatMap(([key, { value }]) =>
+        value === null ? [] : [[key, value]],
+      );
+      for (const { shorter, longer } of contradictions(
+        Object.fromEntries(taken) as Partial<Record<TapeMeasureKey, number>>,
+      )) {
+        const message = `Must be less than the ${MEASURE_INFO[longer].plain}; one of the two has slipped.`;
+        context.addIssue({ code: 'custom', path: [shorter], message });
+      }
+    }),
 });
 
 export type PersonForm = z.infer<typeof personFormSchema>;

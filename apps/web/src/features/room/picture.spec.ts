@@ -52,6 +52,25 @@ function serverSheet(): ServerFitSheet {
 }
 
 describe('what follows from a document', () => {
+  it('names whose measures make no body, and still checks and draws the rest', () => {
+    const slipped: CastMember = {
+      ...known,
+      statureMm: 1625.6,
+      statureSource: 'told',
+      weightKg: 71.7,
+      measured: {
+        sitting_height: { mm: 508 },
+        eye_height_sitting: { mm: 1016 },
+        hip_breadth_sitting: { mm: 700 },
+      },
+    };
+    const whole = createPictureMaker(engine, [slipped]).picture(document);
+    expect(whole.bodies).toEqual([]);
+    expect(whole.undrawn).toEqual(['Hetty Vance']);
+    expect(whole.sheet.rows).toHaveLength(1);
+    expect(createPictureMaker(engine, [known]).picture(document).undrawn).toEqual([]);
+  });
+
   it('asks of a verdict the probability that the workshop asks', () => {
     const told: CastMember = { id: castId, name: 'Hetty Vance', role: '', colour: 3, bodyData: 'mixed' };
     const at = (confidence: number | null) =>

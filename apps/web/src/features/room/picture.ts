@@ -46,6 +46,8 @@ export interface RoomPicture {
   situation: SetSituation;
   sheet: FitSheet;
   bodies: SeatedBody[];
+  /** Sitters whose measures make no body that can be drawn; their checks are made all the same. */
+  undrawn: string[];
 }
 
 /** What the server makes for readers who may not see measures. */
@@ -78,6 +80,8 @@ function crownOf(pose: MannequinPose, frame: PlaceFrame): Vec3 {
 function createBodyMaker() {
   const kept = new Map<string, { key: string; pose: MannequinPose; mesh: MannequinMesh }>();
   return (frame: PlaceFrame, situation: PlaceSituation, body: BodyInput) => {
+    // A slipped digit in one measure may put another below nothing: that person is named, the others are drawn.
+    if (Object.values(body.means).some((value) => !(value > 0))) return undefined;
     const sinkMm = situation.foam ? seatSinkMm(situation.foam, body.weightKg).sinkMm : 0;
     const input = { means: body.means, shoeMm: body.shoeMm, frame, situation, sinkMm };
     const key = JSON.stringify(input);
@@ -151,8 +155,11 @@ export function createPictureMaker(
     );
   }
 
-  function bodiesOf(document: SetDocument, situation: SetSituation): SeatedBody[] {
-    const bodies = inputs(document);
+  function bodiesOf(
+    document: SetDocument,
+    situation: SetSituation,
+    bodies: ReadonlyMap<string, BodyInput>,
+  ): SeatedBody[] {
     const frames = new Map(
       document.pieces.flatMap((piece) => placeFrames(piece, document)).map((frame) => [frame.placeId, frame]),
     );
@@ -162,7 +169,9 @@ export function createPictureMaker(
       const body = bodies.get(placeId);
       const measured = situation.places.find((candidate) => candidate.placeId === placeId);
       if (!frame || !body || !measured) return [];
-      const { pose, mesh } = makeBody(frame, measured, body);
+      const made = makeBody(frame, measured, body);
+      if (!made) return [];
+      const { pose, mesh } = made;
       return [
         {
           placeId,
@@ -183,12 +192,20 @@ export function createPictureMaker(
     const known = pictures.get(document);
     if (known) return known;
     const situation = situationOf(document);
+    const inputsOf = inputs(document);
+    const bodies = bodiesOf(document, situation, inputsOf);
+    const drawn = new Set(bodies.map(({ placeId }) => placeId));
     const whole: RoomPicture = {
       document,
       parts: deriveParts(document),
       situation,
       sheet: check(document),
-      bodies: bodiesOf(document, situation),
+      bodies,
+      undrawn: document.seating
+        .filter(
+          ({ pieceId, place }) => inputsOf.has(`${pieceId}:${place}`) && !drawn.has(`${pieceId}:${place}`),
+        )
+        .map(({ sitter }) => sitterName(sitter, cast)),
     };
     pictures.set(document, whole);
     return whole;

@@ -33,7 +33,8 @@ export function sitterName(ref: SitterRef, cast: readonly CastMember[]): string 
 /** First name for labels in the picture; mannequins keep the short form "Woman, 5th". */
 export function shortName(name: string): string {
   const mannequin = /^(Woman|Man), (\d+\w\w)/.exec(name);
-  return mannequin ? `${mannequin[1]}, ${mannequin[2]}` : (name.split(' ')[0] ?? name);
+  if (mannequin) return `${mannequin[1]}, ${mannequin[2]}`;
+  return /^removed /i.test(name) ? name : (name.split(' ')[0] ?? name);
 }
 
 export function sitterColour(ref: SitterRef, cast: readonly CastMember[]): number {

@@ -122,6 +122,12 @@ export function SceneStage({ picture, piece, address, actions, several, onOpenCe
           <p className="text-xs text-ink-3">{isToScale(letter) ? 'to scale' : 'sizes on the tapes govern'}</p>
         </div>
       </div>
+      {picture.undrawn.length > 0 && (
+        <p className="mb-1 text-sm text-wont">
+          No body can be drawn from the measures of {joinWords(picture.undrawn)}: one of them has slipped.
+          Look at the entry under People.
+        </p>
+      )}
       <div
         ref={sheet}
         role="application"
