@@ -53,18 +53,13 @@ function serverSheet(): ServerFitSheet {
 
 describe('what follows from a document', () => {
   it('names whose measures make no body, and still checks and draws the rest', () => {
-    const slipped: CastMember = {
-      ...known,
-      statureMm: 1625.6,
-      statureSource: 'told',
-      weightKg: 71.7,
-      measured: {
-        sitting_height: { mm: 508 },
-        eye_height_sitting: { mm: 1016 },
-        hip_breadth_sitting: { mm: 700 },
-      },
-    };
-    const whole = createPictureMaker(engine, [slipped]).picture(document);
+    const sheet = serverSheet();
+    const bodies = sheet.bodies?.map((body) => ({
+      ...body,
+      means: { ...body.means, elbow_rest_height: -40 },
+    }));
+    const server = { ...sheet, ...(bodies ? { bodies } : {}) };
+    const whole = createPictureMaker(engine, [known], { server }).picture(document);
     expect(whole.bodies).toEqual([]);
     expect(whole.undrawn).toEqual(['Hetty Vance']);
     expect(whole.sheet.rows).toHaveLength(1);
