@@ -82,12 +82,14 @@ export function* castMap({
   );
   const all = movingRules(answers.map((grid) => grid.flat()));
   const moving = shown ? new Set([...all].filter((ruleId) => shown.has(ruleId))) : all;
-  const regions = people.map(({ sitterId, placeId, name }, n): Region => {
+  const regions = people.flatMap(({ sitterId, placeId, name }, n): Region[] => {
     const grid = answers[n] ?? [];
-    const rooms = grid.map((row) => row.map((said) => roomOf(said, moving)));
-    const states = grid.map((row) => row.map((said) => stateOf(said, moving)));
-    const blockedBy = rooms.flat().every((room) => room < 0) ? blockOf(grid.flat(), moving) : undefined;
-    return { sitterId, placeId, name, rooms, states, ...(blockedBy ? { blockedBy } : {}) };
+    const asked = askedOf(grid.flat(), moving);
+    if (asked.size === 0) return [];
+    const rooms = grid.map((row) => row.map((said) => roomOf(said, asked)));
+    const states = grid.map((row) => row.map((said) => stateOf(said, asked)));
+    const blockedBy = rooms.flat().every((room) => room < 0) ? blockOf(grid.flat(), asked) : undefined;
+    return [{ sitterId, placeId, name, rooms, states, ...(blockedBy ? { blockedBy } : {}) }];
   });
   return { across: [...across], up: [...up], ruleIds: [...moving], regions, placesAt };
 }
@@ -116,17 +118,24 @@ function movingRules(answers: readonly (Said | undefined)[][]): Set<string> {
   return moving;
 }
 
-function roomOf(said: Said | undefined, moving: ReadonlySet<string>): number {
-  if (!said) return -FAR;
-  const rooms = [...said].filter(([ruleId]) => moving.has(ruleId)).map(([, { margin }]) => margin);
-  return Math.min(FAR, Math.max(-FAR, Math.min(FAR, ...rooms)));
+/** Moving rules that are asked of a sitter somewhere on the map. */
+const askedOf = (along: readonly (Said | undefined)[], moving: ReadonlySet<string>): Set<string> =>
+  new Set(along.flatMap((said) => [...(said?.keys() ?? [])].filter((ruleId) => moving.has(ruleId))));
+
+/** What the asked rules say; `undefined` where one of them is no longer asked, as when the place or its table is gone. */
+function outcomesOf(said: Said | undefined, asked: ReadonlySet<string>) {
+  const found = [...asked].flatMap((ruleId) => said?.get(ruleId) ?? []);
+  return found.length === asked.size ? found : undefined;
 }
 
-function stateOf(said: Said | undefined, moving: ReadonlySet<string>): Served {
-  const verdicts = [...(said ?? [])]
-    .filter(([ruleId]) => moving.has(ruleId))
-    .map(([, { verdict }]) => verdict);
-  if (!said || verdicts.includes('wontFit')) return 'lost';
+function roomOf(said: Said | undefined, asked: ReadonlySet<string>): number {
+  const rooms = outcomesOf(said, asked)?.map(({ margin }) => margin) ?? [-FAR];
+  return Math.min(FAR, Math.max(-FAR, Math.min(...rooms)));
+}
+
+function stateOf(said: Said | undefined, asked: ReadonlySet<string>): Served {
+  const verdicts = outcomesOf(said, asked)?.map(({ verdict }) => verdict);
+  if (!verdicts || verdicts.includes('wontFit')) return 'lost';
   return verdicts.includes('notKnown') ? 'notKnown' : 'served';
 }
 

@@ -1,0 +1,67 @@
+import { createBodyModel, checkSet, loadRuleBook, type FitSheet } from '@settlewright/anthropometry';
+import { ARRANGEMENTS, dimensionOf, measureSet, type SetDocument } from '@settlewright/geometry';
+import rules from '@settlewright/seed-data/fit-rules.json';
+import summary from '@settlewright/seed-data/populations/ansur2.json';
+import { describe, expect, it } from 'vitest';
+import { castMap, type CastMap } from './cast-map.ts';
+
+const model = createBodyModel(summary);
+const ruleBook = loadRuleBook(rules);
+const bay = ARRANGEMENTS.find(({ id }) => id === 'facing-benches')?.build() as SetDocument;
+const height = dimensionOf(bay, 'seat-height');
+const values = [380, 420, 460];
+
+/** One woman at a place; the second value takes her place away. */
+const check = (document: SetDocument): FitSheet =>
+  checkSet({
+    situation: measureSet(document),
+    sitters: [
+      {
+        id: 'one',
+        name: 'One',
+        kind: 'mannequin',
+        placeId: 'b1:2',
+        person: model.mannequin({ bodyData: 'women', measure: 'stature', percentile: 50 }),
+      },
+    ],
+    ruleBook,
+    model,
+    settings: { backPosture: 'dining', trafficBehind: 'none' },
+  });
+
+function documentAt(first: number, second: number): SetDocument | undefined {
+  const set = height?.at(first);
+  if (second === 0) return set;
+  return (
+    set && {
+      ...set,
+      pieces: set.pieces.map((piece) =>
+        piece.id === 'b1' && piece.kind === 'bench' ? { ...piece, places: { by: 'count', count: 1 } } : piece,
+      ),
+    }
+  );
+}
+
+function run(steps: Generator<number, CastMap, void>): CastMap {
+  for (;;) {
+    const step = steps.next();
+    if (step.done) return step.value;
+  }
+}
+
+describe('a map of two numbers', () => {
+  const shown = new Set(['SEAT-02']);
+  const map = run(castMap({ across: values, up: [0, 1], documentAt, check, shown }));
+
+  it('never serves somebody whose place is gone', () => {
+    const [there, gone] = map.regions[0]?.states ?? [];
+    expect(there).toContain('served');
+    expect(gone).toEqual(['lost', 'lost', 'lost']);
+    expect(map.regions[0]?.rooms[1]?.every((room) => room < 0)).toBe(true);
+  });
+
+  it('leaves out whoever no moving check asks', () => {
+    const other = new Set(['SEAT-05']);
+    expect(run(castMap({ across: values, up: [0], documentAt, check, shown: other })).regions).toEqual([]);
+  });
+});
