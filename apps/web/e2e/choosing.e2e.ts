@@ -17,6 +17,24 @@ const CAST = [
   ['Henrik Sol', 'men', 1905],
 ] as const;
 const PLACES = 4;
+/** What a tape finds, by measure; near the middle, so that any of the eight may have it. */
+const TAKEN: Record<string, string> = {
+  stature: '1700 mm',
+  weight_kg: '72 kg',
+  sitting_height: '890 mm',
+  eye_height_sitting: '780 mm',
+  acromial_height_sitting: '585 mm',
+  elbow_rest_height: '238 mm',
+  popliteal_height: '410 mm',
+  knee_height_sitting: '535 mm',
+  buttock_popliteal_length: '495 mm',
+  buttock_knee_length: '605 mm',
+  thigh_clearance: '174 mm',
+  hip_breadth_sitting: '388 mm',
+  bideltoid_breadth: '480 mm',
+  forearm_forearm_breadth: '535 mm',
+  abdominal_extension_depth_sitting: '242 mm',
+};
 
 /** Two long benches that face each other, everybody seated in the order of the cast. */
 function longSaloon(ids: readonly string[]): SetDocument {
@@ -95,12 +113,14 @@ describe('choosing dimensions for people known by their height alone', () => {
   it('settles verdicts once the suggested measurements are entered', async () => {
     const before = await notKnown(page);
     const link = page.getByRole('link', { name: /, enter it for / }).first();
+    const measure =
+      new URL((await link.getAttribute('href')) ?? '', page.url()).searchParams.get('field') ?? '';
     await link.click();
     const dialog = page.getByRole('dialog');
     await dialog.getByRole('button', { name: 'Save' }).waitFor();
     const field = dialog.locator('input:focus');
     await field.waitFor();
-    await field.fill((await field.getAttribute('inputmode')) === 'decimal' ? '70' : '9 1/4');
+    await field.fill(TAKEN[measure] ?? '');
     await dialog.getByRole('button', { name: 'Save' }).click();
     await dialog.waitFor({ state: 'detached' });
     await page.goto(`${room}/fit`);
