@@ -30,11 +30,17 @@ export function markWords(marks: readonly string[]): string {
   return joinWords(marks);
 }
 
-/** First name for lines where room is short; a mannequin keeps "Woman, 5th". */
-export function firstName(name: string): string {
-  const [mannequin] = /^(Woman|Man), \d+\w\w/.exec(name) ?? [];
-  return mannequin ?? name.split(' ')[0] ?? name;
+/** How a dimension stands in a list: "Seat height, pressed: B1 to B4 with T1 and T2". */
+export function dimensionWords({ label, marks, tableMarks }: Dimension): string {
+  const tables = tableMarks.length === 0 ? '' : ` with ${markWords(tableMarks)}`;
+  return `${label}: ${markWords(marks)}${tables}`;
 }
+
+const STEPS: Record<Exclude<Dimension['unit'], 'mm'>, number> = { deg: 0.5, N: 5 };
+
+/** The step by which a dimension is chosen. */
+export const dimensionStep = (unit: Dimension['unit'], lengthStepMm: number): number =>
+  unit === 'mm' ? lengthStepMm : STEPS[unit];
 
 /** Ends a sentence that may have its full stop already. */
 export const sentence = (text: string): string => text.replace(/[.\s]*$/, '.');

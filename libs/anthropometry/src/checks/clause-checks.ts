@@ -1,6 +1,6 @@
 import { accessibleOnly } from './clause.ts';
 import type { PieceAsked, PieceCheck } from './piece-check.ts';
-import { ruleNumber, type Rule } from './rule-book.ts';
+import { MM_PER_INCH, ruleNumber, type Rule } from './rule-book.ts';
 import type { BenchSituation, TableSituation } from './situation.ts';
 
 const benches = (asked: PieceAsked): BenchSituation[] => asked.situation.benches;
@@ -96,8 +96,6 @@ export function kneeDepthNeededMm(rule: Rule, heightMm: number): number {
   const held = Math.min(Math.max(heightMm, from), ruleNumber(rule, 'kneeTo'));
   return ruleNumber(rule, 'kneeDepthAtFrom') - (held - from) * (MM_PER_INCH / ruleNumber(rule, 'kneeRise'));
 }
-
-const MM_PER_INCH = 25.4;
 
 /**
  * Knee and toe space below an accessible table. Depth beyond the clause's most is not counted, nor is toe space

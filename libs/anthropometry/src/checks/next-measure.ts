@@ -3,6 +3,7 @@ import type { BodyModel } from '../people/body-model.ts';
 import { quantile } from '../people/estimate.ts';
 import type { KnownPerson } from '../people/person.ts';
 import type { FitCell, SitterRow } from './fit-sheet.ts';
+import { isUncertain } from './verdict.ts';
 
 /** What a tape can take of a person who is not yet known by it: the seated measures, stature and weight. */
 export type NextMeasureKey = (typeof TAPE_MEASURE_KEYS)[number] | 'stature' | 'weight_kg';
@@ -30,7 +31,6 @@ const SLICES = 7;
 const SECOND_SLICES = 5;
 /** A measurement that settles less than this on average is not worth a visit. */
 const WORTH_TAKING = 0.15;
-const ROUNDING = 1e-9;
 
 /**
  * True when none of the three plain answers of a verdict is as sure as asked.
@@ -39,9 +39,7 @@ const ROUNDING = 1e-9;
  * @param confidence - probability a verdict asks for
  */
 export function isUncertainCell({ outcome }: FitCell, confidence: number): boolean {
-  if (outcome.kind !== 'verdict') return false;
-  const { pass, insideFail } = outcome.probability;
-  return Math.max(pass, insideFail - pass, 1 - insideFail) < confidence - ROUNDING;
+  return outcome.kind === 'verdict' && isUncertain(outcome.probability, confidence);
 }
 
 /**

@@ -213,7 +213,8 @@ export function loadRuleBook(json: unknown): RuleBook {
   };
 }
 
-const MM_PER_INCH = 25.4;
+/** Exact. */
+export const MM_PER_INCH = 25.4;
 
 /**
  * One number of a rule.

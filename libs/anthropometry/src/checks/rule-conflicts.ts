@@ -1,5 +1,5 @@
 import type { FitCell, Outcome, VerdictOutcome } from './fit-sheet.ts';
-import type { RuleBook, RuleConflict } from './rule-book.ts';
+import { MM_PER_INCH, type RuleBook, type RuleConflict } from './rule-book.ts';
 
 /** What of a cell tells whether rules are at odds; a sheet of verdicts alone has it too. */
 type SaidCell = Pick<FitCell, 'ruleId' | 'pieceIds' | 'marks'> & {
@@ -121,8 +121,6 @@ function marksOf(pairs: readonly Pair<SaidCell>[]): string[] {
   );
   return [...new Set(marks)];
 }
-
-const MM_PER_INCH = 25.4;
 
 /**
  * The note of a conflict with its numbers written in.

@@ -146,7 +146,10 @@ export function verdictFor({ pass, insideFail }: VerdictOutcome['probability'], 
 }
 
 /** True when none of the three plain answers is as sure as asked. */
-function isUncertain({ pass, insideFail }: VerdictOutcome['probability'], confidence: number): boolean {
+export function isUncertain(
+  { pass, insideFail }: VerdictOutcome['probability'],
+  confidence: number,
+): boolean {
   return Math.max(pass, insideFail - pass, 1 - insideFail) < confidence - ROUNDING;
 }
 

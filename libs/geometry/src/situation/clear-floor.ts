@@ -1,17 +1,17 @@
 import type { PieceOf } from '../room/document.ts';
 import { benchLayout } from '../pieces/bench-layout.ts';
+import { MM_PER_INCH } from '../units/length-style.ts';
 import { clipped, extent, type PlanOutline, type PlanSolid } from './plan.ts';
 import { planOfPiece, solidsNear, type Survey } from './survey.ts';
 
 /** What hangs higher than this is in nobody's way on the floor, millimetres: 80 in, ADA 307.4 (from memory). */
 export const OVER_HEADS_MM = 2032;
-const INCH_MM = 25.4;
 /** Clear floor is measured up to here; more asks nobody. */
 const FAR_MM = 2000;
 /** Clear floor of ADA 305.3, at the place where it is looked for: 30 by 48 in. */
-const FLOOR_MM = [30 * INCH_MM, 48 * INCH_MM] as const;
+const FLOOR_MM = [30 * MM_PER_INCH, 48 * MM_PER_INCH] as const;
 /** ADA 304.3.2: a T lies within a square of 60 in. */
-const TEE_SQUARE_MM = 60 * INCH_MM;
+const TEE_SQUARE_MM = 60 * MM_PER_INCH;
 const NUDGE_MM = 0.01;
 
 /** A spot on the floor. */

@@ -1,3 +1,4 @@
+import { MM_PER_INCH } from '../units/length-style.ts';
 import type { PlaceSituation, TableSituation } from '@settlewright/anthropometry';
 import type { PieceOf } from '../room/document.ts';
 import { clipped, extent, inFrame, type PlanFrame, type PlanSolid } from './plan.ts';
@@ -6,21 +7,20 @@ import { planOfPiece, solidsNear, type Survey, type SurveyedPlace } from './surv
 type Table = PieceOf<'table'>;
 type EdgeName = TableSituation['edges'][number]['name'];
 
-const INCH_MM = 25.4;
 /** Legs deeper under the table than this are not between anybody's knees. */
 const KNEE_ZONE_MM = 300;
 /** Room outside the outermost leg narrower than this is of no use to a sitter. */
 const USABLE_END_MM = 300;
 /** Heights at which ADA 306.3 is asked: 9 to 27 in, every 3. */
-const ADA_HEIGHTS_MM = [9, 12, 15, 18, 21, 24, 27].map((inches) => inches * INCH_MM);
+const ADA_HEIGHTS_MM = [9, 12, 15, 18, 21, 24, 27].map((inches) => inches * MM_PER_INCH);
 /** ADA 306: space deeper than 25 in below the edge does not count. */
-const ADA_DEEPEST_MM = 25 * INCH_MM;
+const ADA_DEEPEST_MM = 25 * MM_PER_INCH;
 /** ADA 306.3.5: knee clearance is 30 in wide. */
-const ADA_WIDTH_MM = 30 * INCH_MM;
+const ADA_WIDTH_MM = 30 * MM_PER_INCH;
 /** ADA 306.2: toe clearance lies below 9 in. */
-const TOE_TOP_MM = 9 * INCH_MM;
+const TOE_TOP_MM = 9 * MM_PER_INCH;
 /** ADA 306.3.3: the shallowest knee clearance, at 27 in. */
-const ADA_SHALLOWEST_MM = 8 * INCH_MM;
+const ADA_SHALLOWEST_MM = 8 * MM_PER_INCH;
 
 const HANGING = ['top', 'edge-lip', 'apron'];
 const FRONT: { name: EdgeName; turnRad: number } = { name: 'front', turnRad: 0 };

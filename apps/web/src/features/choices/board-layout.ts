@@ -1,3 +1,4 @@
+import { MM_PER_INCH } from '@settlewright/geometry';
 import type { Dimension } from '@settlewright/geometry';
 
 /** Places of the parts of a story stick, in pixels. */
@@ -70,8 +71,6 @@ export interface Tick {
   size: 'long' | 'middle' | 'short';
   label?: string;
 }
-
-const MM_PER_INCH = 25.4;
 
 function ticks(
   min: number,

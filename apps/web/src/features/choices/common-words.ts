@@ -5,9 +5,10 @@ import {
   type StoryStick,
   type Stretch,
 } from '@settlewright/geometry';
-import { exactValue, firstName, joinWords } from '@/lib/dimension-words.ts';
+import { exactValue, joinWords } from '@/lib/dimension-words.ts';
 import { furthestApart, seatElsewhere, SERVED } from './suggestion.ts';
 import { countWords } from './words.ts';
+import { shortName } from '@/lib/short-name.ts';
 
 /** Whether one value suits everybody by their verdicts, what is not known never; if none does, who stands furthest apart and whom to seat elsewhere. */
 export function commonWords(
@@ -22,7 +23,7 @@ export function commonWords(
   const down = (value: number) => show(Math.floor(value / step + 1e-3) * step);
   // A single tried value may lie between two steps: it is the present one.
   const span = ({ from, to }: Stretch) => (to - from < step / 2 ? show(from) : `${up(from)} to ${down(to)}`);
-  const all = rows.length === 1 ? firstName(rows[0]?.name ?? '') : `all ${countWords(rows.length)}`;
+  const all = rows.length === 1 ? shortName(rows[0]?.name ?? '') : `all ${countWords(rows.length)}`;
   const [fit, tight] = [allFit[0], allTight[0]];
   if (fit) return `${span(fit)} fits ${all}.`;
   if (tight) return `${span(tight)} is at least tight for ${all}; no value fits ${all}.`;
@@ -37,18 +38,18 @@ export function commonWords(
   return [
     `No value ${mayBe ? 'is known to suit' : 'suits'} ${all}${
       apart
-        ? `: ${firstName(apart.low.name)} needs ${down(apart.low.tight.at(-1)?.to ?? 0)} or less${guess(apart.low)}, ${firstName(apart.high.name)} ${up(apart.high.tight[0]?.from ?? 0)} or more${guess(apart.high)}`
+        ? `: ${shortName(apart.low.name)} needs ${down(apart.low.tight.at(-1)?.to ?? 0)} or less${guess(apart.low)}, ${shortName(apart.high.name)} ${up(apart.high.tight[0]?.from ?? 0)} or more${guess(apart.high)}`
         : ''
     }.`,
     ...(never.length > 0
-      ? [`None between the ends of the tape suits ${joinWords(never.map(({ name }) => firstName(name)))}.`]
+      ? [`None between the ends of the tape suits ${joinWords(never.map(({ name }) => shortName(name)))}.`]
       : []),
     ...(unsure.length > 0 && rows.length > 1
-      ? [`None is known to suit ${joinWords(unsure.map(({ name }) => firstName(name)))}.`]
+      ? [`None is known to suit ${joinWords(unsure.map(({ name }) => shortName(name)))}.`]
       : []),
     ...(elsewhere && elsewhere.rows.length < rows.length
       ? [
-          `Seat ${joinWords(elsewhere.rows.map(({ name }) => firstName(name)))} elsewhere, and ${span(elsewhere.others)} suits the others.`,
+          `Seat ${joinWords(elsewhere.rows.map(({ name }) => shortName(name)))} elsewhere, and ${span(elsewhere.others)} suits the others.`,
         ]
       : []),
   ].join(' ');

@@ -8,8 +8,9 @@ import {
   type LengthStyle,
 } from '@settlewright/geometry';
 import { verdictWord } from '@/components/verdict.tsx';
-import { firstName, joinWords } from '@/lib/dimension-words.ts';
+import { joinWords } from '@/lib/dimension-words.ts';
 import { answerAt, shortBy } from './answers.ts';
+import { shortName } from '@/lib/short-name.ts';
 
 /** What a choice does, in words. */
 export interface Effects {
@@ -41,7 +42,7 @@ interface Input {
 
 /** Who gains and who loses between two sheets, by name. */
 export function effectsOf({ before, after, ruleIds, ruleBook, style }: Input): Effects {
-  const names = new Map(before.rows.map(({ sitterId, name }) => [sitterId, firstName(name)]));
+  const names = new Map(before.rows.map(({ sitterId, name }) => [sitterId, shortName(name)]));
   const whoOf = ({ sitterId, marks }: CellChange) => names.get(sitterId ?? '') ?? joinWords(marks);
   const checkOf = ({ ruleId }: CellChange) => ruleBook.rule(ruleId).columnName.toLowerCase();
   const changes = sheetChanges(before, after);
@@ -91,7 +92,7 @@ export function lostIn(
   return sheet.rows.flatMap(({ placeId, name }) => {
     const answer = answerAt(sheet, placeId, ruleIds);
     return answer?.outcome.verdict === 'wontFit'
-      ? [`${firstName(name)}, ${shortBy(answer, ruleBook, style)}`]
+      ? [`${shortName(name)}, ${shortBy(answer, ruleBook, style)}`]
       : [];
   });
 }

@@ -1,3 +1,4 @@
+import { MM_PER_INCH } from '@settlewright/geometry';
 import type { Practice, RuleBook } from '@settlewright/anthropometry';
 import type { LengthStyle, StoryStick, Stretch } from '@settlewright/geometry';
 import { dimensionValue, markWords } from '@/lib/dimension-words.ts';
@@ -10,8 +11,6 @@ export interface StickBand {
   words: string;
   stretches: Stretch[];
 }
-
-const MM_PER_INCH = 25.4;
 
 /** Practices are kept by the kind of number they are about. */
 function practiceOf(ruleBook: RuleBook, dimensionId: string): Practice | undefined {

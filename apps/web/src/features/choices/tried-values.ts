@@ -1,4 +1,5 @@
 import { dimensionOf, stickValues, type Dimension, type SetDocument } from '@settlewright/geometry';
+import { dimensionStep } from '@/lib/dimension-words.ts';
 
 /** The sets along one dimension, each made once. It stays while the set only moves along that dimension. */
 export interface TriedValues {
@@ -13,12 +14,6 @@ export interface TriedValues {
   /** The nearest value that can be chosen. */
   snap: (value: number) => number;
 }
-
-const STEPS: Record<Exclude<Dimension['unit'], 'mm'>, number> = { deg: 0.5, N: 5 };
-
-/** The step by which a dimension is chosen. */
-export const stepFor = (unit: Dimension['unit'], lengthStepMm: number): number =>
-  unit === 'mm' ? lengthStepMm : STEPS[unit];
 
 /** Prepares the sets along a dimension of a set; nothing when it has no such number. */
 export function triedValues(
@@ -41,7 +36,7 @@ export function triedValues(
     }
     return made.get(key);
   };
-  const step = stepFor(found.unit, lengthStepMm);
+  const step = dimensionStep(found.unit, lengthStepMm);
   return {
     dimension: { ...found, at },
     step,

@@ -6,7 +6,8 @@ import { castMap, gridValues, type CastMap } from './cast-map.ts';
 import { useChoices } from './choices-view.ts';
 import { inSlices } from './in-slices.ts';
 import { changingPlaces } from './places-along.ts';
-import { stepFor, type TriedValues } from './tried-values.ts';
+import { type TriedValues } from './tried-values.ts';
+import { dimensionStep } from '@/lib/dimension-words.ts';
 
 /** Fewer than for a curve: the map is shaded in broad tones. */
 const MAP_COUNT = 4000;
@@ -49,8 +50,8 @@ export function useCastMap(
   useEffect(() => {
     if (!second) return undefined;
     const stop = new AbortController();
-    const across = gridValues(first, stepFor(first.unit, stepMm));
-    const up = gridValues(second, stepFor(second.unit, stepMm));
+    const across = gridValues(first, dimensionStep(first.unit, stepMm));
+    const up = gridValues(second, dimensionStep(second.unit, stepMm));
     const documentAt = (x: number, y: number) => {
       const moved = first.at(x);
       return moved && second.at(y, moved);

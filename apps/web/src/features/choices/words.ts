@@ -1,5 +1,6 @@
 import { spokenLength, type Dimension, type LengthStyle } from '@settlewright/geometry';
 import { markWords } from '@/lib/dimension-words.ts';
+import { numberWord } from '@/lib/number-word.ts';
 type Unit = Dimension['unit'];
 
 /** A value for a screen reader: "18 inches". */
@@ -19,30 +20,8 @@ export function movingWords({ marks, tableMarks }: Pick<Dimension, 'marks' | 'ta
   return `${markWords(marks)}${tables}`;
 }
 
-/** How a dimension stands in a list: "Seat height, pressed: B1 to B4 with T1 and T2". */
-export function dimensionWords({ label, marks, tableMarks }: Dimension): string {
-  const tables = tableMarks.length === 0 ? '' : ` with ${markWords(tableMarks)}`;
-  return `${label}: ${markWords(marks)}${tables}`;
-}
-
-const SMALL = [
-  'none',
-  'one',
-  'two',
-  'three',
-  'four',
-  'five',
-  'six',
-  'seven',
-  'eight',
-  'nine',
-  'ten',
-  'eleven',
-  'twelve',
-];
-
-/** Small numbers as words. */
-export const countWords = (n: number): string => SMALL[n] ?? String(n);
+/** Small numbers as words, "none" for 0. */
+export const countWords = (n: number): string => (n === 0 ? 'none' : numberWord(n));
 
 /** "23 in 100". */
 export const inHundred = (share: number): string => `${Math.round(share * 100)} in 100`;

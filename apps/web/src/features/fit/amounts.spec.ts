@@ -1,7 +1,8 @@
 import { describe, expect, it } from 'vitest';
-import { marginText, outcomeWords, shortName } from './amounts.ts';
+import { marginText, outcomeWords } from './amounts.ts';
 import { sheet } from './test/show-sheet.tsx';
 import { closedLedger, marginSum } from './sums.ts';
+import { shortName } from '@/lib/short-name.ts';
 
 const INCHES = { system: 'feet-inches', roundTo: 8 } as const;
 const MM = { system: 'millimetres', roundTo: 8 } as const;

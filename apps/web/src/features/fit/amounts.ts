@@ -40,12 +40,3 @@ export function outcomeWords(outcome: Outcome, unit: RuleUnit, style: LengthStyl
       return outcome.reason;
   }
 }
-
-/** First name for lines where room is short; a mannequin keeps "Woman, 5th". */
-export function shortName(name: string): string {
-  const [mannequin] = /^(Woman|Man), \d+\w\w/.exec(name) ?? [];
-  return mannequin ?? (NOT_A_FIRST_NAME.test(name) ? name : (name.split(' ')[0] ?? name));
-}
-
-/** "The stand-in", "removed sitter 2": words for somebody, not a first name and another. */
-const NOT_A_FIRST_NAME = /^(the|removed) /i;

@@ -1,25 +1,5 @@
 import type { PieceKind, SetDocument } from '@settlewright/geometry';
-
-const NUMBERS = [
-  'no',
-  'one',
-  'two',
-  'three',
-  'four',
-  'five',
-  'six',
-  'seven',
-  'eight',
-  'nine',
-  'ten',
-  'eleven',
-  'twelve',
-];
-
-/** "four", or "13" from there on. */
-export function numberWord(count: number): string {
-  return NUMBERS[count] ?? String(count);
-}
+import { numberWord } from '@/lib/number-word.ts';
 
 const KINDS: readonly { kind: PieceKind; one: string; many: string }[] = [
   { kind: 'bench', one: 'bench', many: 'benches' },

@@ -30,13 +30,6 @@ export function sitterName(ref: SitterRef, cast: readonly CastMember[]): string 
   return cast.find((member) => member.id === ref.castId)?.name ?? 'removed sitter';
 }
 
-/** First name for labels in the picture; mannequins keep the short form "Woman, 5th". */
-export function shortName(name: string): string {
-  const mannequin = /^(Woman|Man), (\d+\w\w)/.exec(name);
-  if (mannequin) return `${mannequin[1]}, ${mannequin[2]}`;
-  return /^removed /i.test(name) ? name : (name.split(' ')[0] ?? name);
-}
-
 export function sitterColour(ref: SitterRef, cast: readonly CastMember[]): number {
   if (ref.kind === 'cast') return cast.find((member) => member.id === ref.castId)?.colour ?? 6;
   return ref.bodyData === 'women' ? 4 : 2;

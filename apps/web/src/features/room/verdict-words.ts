@@ -1,7 +1,7 @@
 import type { FitCell, FitSheet, RuleBook, Verdict } from '@settlewright/anthropometry';
 import type { SetDocument } from '@settlewright/geometry';
 import { verdictWord } from '@/components/verdict.tsx';
-import { shortName } from './sitters.ts';
+import { shortName } from '@/lib/short-name.ts';
 
 const RANK: Record<Verdict, number> = { fits: 0, tight: 1, notKnown: 2, wontFit: 3 };
 

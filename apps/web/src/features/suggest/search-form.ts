@@ -1,6 +1,7 @@
 import type { FreeDimension, LengthStyle, SetDocument, Dimension } from '@settlewright/geometry';
 import { dimensionsOf, lengthStep } from '@settlewright/geometry';
 import { DEFAULT_CROWD, type CrowdChoice } from '@/lib/crowd/crowds.ts';
+import { dimensionStep } from '@/lib/dimension-words.ts';
 
 /** How far one dimension may go; in its own unit. */
 export interface Freedom {
@@ -52,10 +53,6 @@ export function startForm(document: SetDocument): SearchForm {
   };
 }
 
-/** Rounding step of a dimension. */
-export const stepOf = (unit: Dimension['unit'], style: LengthStyle): number =>
-  unit === 'mm' ? lengthStep(style) : unit === 'deg' ? 0.5 : 5;
-
 /** The free dimensions of a form, of those that the set still has. */
 export function freeOf(
   form: SearchForm,
@@ -64,7 +61,7 @@ export function freeOf(
 ): FreeDimension[] {
   return form.freedoms.flatMap(({ dimensionId, min, max }) => {
     const found = dimensions.find(({ id }) => id === dimensionId);
-    return found ? [{ dimensionId, min, max, step: stepOf(found.unit, style) }] : [];
+    return found ? [{ dimensionId, min, max, step: dimensionStep(found.unit, lengthStep(style)) }] : [];
   });
 }
 

@@ -5,7 +5,6 @@ import { clashOf, freeOf, questionOf, startForm, startFreedom } from './search-f
 import { bay, check, INCHES, ruleBook } from './test/show-suggest.tsx';
 import {
   blameWords,
-  dimensionWords,
   publicWords,
   servedWords,
   shareWords,
@@ -13,6 +12,7 @@ import {
   stepWords,
   timeLeftWords,
 } from './words.ts';
+import { dimensionWords } from '@/lib/dimension-words.ts';
 
 const dimensions = dimensionsOf(bay);
 const free = freeOf(startForm(bay), dimensions, INCHES);

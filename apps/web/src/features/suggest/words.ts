@@ -1,21 +1,9 @@
 import type { FitSheet, RuleBook } from '@settlewright/anthropometry';
-import type { Blame, Dimension, LengthStyle, SetDocument, Suggestion } from '@settlewright/geometry';
-import {
-  aboutInHundred,
-  dimensionValue,
-  exactValue,
-  firstName,
-  joinWords,
-  markWords,
-} from '@/lib/dimension-words.ts';
+import type { Blame, Dimension, LengthStyle, Suggestion } from '@settlewright/geometry';
+import { aboutInHundred, dimensionValue, exactValue, joinWords, markWords } from '@/lib/dimension-words.ts';
 import type { SearchTold } from './search.ts';
 import { checkWords, shortCells, type Effects, type Move, type PersonEffect } from './effects.ts';
-
-/** How a dimension stands in the list: "Seat height, pressed: B1 to B4 with T1 and T2". */
-export function dimensionWords({ label, marks, tableMarks }: Dimension): string {
-  const tables = tableMarks.length > 0 ? ` with ${markWords(tableMarks)}` : '';
-  return `${label}: ${markWords(marks)}${tables}`;
-}
+import { shortName } from '@/lib/short-name.ts';
 
 /** "Seat height of B1 to B4" inside a sentence. */
 function subject({ label, marks, tableMarks }: Dimension): string {
@@ -59,7 +47,7 @@ export function stepWords(moves: readonly Move[], style: LengthStyle): string {
 
 /** "Hetty: seat height fits, table height tight". */
 export const personWords = ({ name, checks }: PersonEffect): string =>
-  `${firstName(name)}: ${checks.join(', ')}`;
+  `${shortName(name)}: ${checks.join(', ')}`;
 
 /** How many people an answer serves: "All six are at least tight in every check." */
 export function servedWords({ served, of }: Pick<Effects, 'served' | 'of'>): string {
@@ -122,7 +110,7 @@ export function blameWords(blame: Blame, { sheet, ruleBook, show }: Ground): Bla
   const rails = footRails(sheet, show);
   if (blame.kind === 'rule') {
     const who = sheet.rows.filter((row) => shortCells(row).some(({ ruleId }) => ruleId === blame.id));
-    const names = joinWords(who.map(({ name }) => firstName(name)));
+    const names = joinWords(who.map(({ name }) => shortName(name)));
     return {
       what: `${ruleBook.rule(blame.id).columnName} is what stands most in the way${names ? `, for ${names}` : ''}: without it ${left}.`,
       help: [
@@ -132,7 +120,7 @@ export function blameWords(blame: Blame, { sheet, ruleBook, show }: Ground): Bla
     };
   }
   const row = sheet.rows.find(({ sitterId }) => sitterId === blame.id);
-  const name = row ? firstName(row.name) : 'One sitter';
+  const name = row ? shortName(row.name) : 'One sitter';
   const unknown = row?.cells.some(
     ({ outcome }) => outcome.kind === 'verdict' && outcome.verdict === 'notKnown',
   );
@@ -156,7 +144,7 @@ function footRails({ rows }: FitSheet, show: (mm: number) => string): string[] {
     const { value, fail, pass } = outcome;
     if (fail.upper === undefined || value <= fail.upper) return [];
     return [
-      `Give ${firstName(name)} a foot rail ${show(value - (pass.upper ?? fail.upper))} high: the seat is too high by that.`,
+      `Give ${shortName(name)} a foot rail ${show(value - (pass.upper ?? fail.upper))} high: the seat is too high by that.`,
     ];
   });
 }
@@ -168,16 +156,6 @@ export function differenceWords(moves: readonly Move[], style: LengthStyle): str
     return `${of} kept at ${from} (suggested ${to})`;
   });
   return kept.length === 0 ? 'Dimensions kept as they are' : capital(joinWords(kept));
-}
-
-/** The set with the choice written into its known differences. */
-export function withDifference(
-  document: SetDocument,
-  said: { id: string; text: string; reason: string; by: string | undefined; on: string },
-): SetDocument {
-  const { id, text, reason, by, on } = said;
-  const added = { id, text, ...(reason ? { reason } : {}), ...(by ? { by } : {}), on };
-  return { ...document, knownDifferences: [...document.knownDifferences, added] };
 }
 
 /** "about 4 seconds left"; nothing before it can be told. */

@@ -1,3 +1,4 @@
+import type { Reply } from '../ask-worker.ts';
 import { createCrowdDesk } from './crowd-desk.ts';
 import type { CrowdTask, CrowdTasks } from './crowd-tasks.ts';
 
@@ -8,15 +9,13 @@ export interface Question<Task extends CrowdTask = CrowdTask> {
   asked: CrowdTasks[Task]['asked'];
 }
 
-export type Reply = { id: number } & ({ answer: unknown } | { fault: string });
-
 const desk = createCrowdDesk();
 let turn: Promise<unknown> = Promise.resolve();
 
 // One after the other: the desk keeps one crowd at a time.
 self.onmessage = ({ data: { id, task, asked } }: MessageEvent<Question>) => {
   turn = turn.then(async () => {
-    const reply: Reply = await desk.answer(task, asked).then(
+    const reply: Reply<unknown> = await desk.answer(task, asked).then(
       (answer) => ({ id, answer }),
       (fault: unknown) => ({ id, fault: fault instanceof Error ? fault.message : String(fault) }),
     );

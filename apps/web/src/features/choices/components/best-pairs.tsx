@@ -1,9 +1,10 @@
 import type { Dimension } from '@settlewright/geometry';
 import { Button } from '@/components/button.tsx';
 import { Measure } from '@/components/measure.tsx';
-import { aboutInHundred, exactValue, firstName, joinWords } from '@/lib/dimension-words.ts';
+import { aboutInHundred, exactValue, joinWords } from '@/lib/dimension-words.ts';
 import type { BestPair, CastMap } from '../cast-map.ts';
 import { useChoices } from '../choices-view.ts';
+import { shortName } from '@/lib/short-name.ts';
 
 interface BestPairsProps {
   pairs: readonly BestPair[];
@@ -81,5 +82,5 @@ export function BestPairs({ pairs, map, first, second, onTake }: BestPairsProps)
 
 function namesAt({ across, up, regions }: CastMap, pair: BestPair, state: 'lost' | 'notKnown'): string[] {
   const [i, j] = [up.indexOf(pair.up), across.indexOf(pair.across)];
-  return regions.filter(({ states }) => states[i]?.[j] === state).map(({ name }) => firstName(name));
+  return regions.filter(({ states }) => states[i]?.[j] === state).map(({ name }) => shortName(name));
 }

@@ -1,7 +1,6 @@
 import type { StickRow, StoryStick } from '@settlewright/geometry';
 import { memo } from 'react';
 import { SitterDot } from '@/components/sitter-dot.tsx';
-import { firstName } from '@/lib/dimension-words.ts';
 import { BAND_HEIGHT, tapeTicks, type BoardLayout } from '../board-layout.ts';
 import { useChoices } from '../choices-view.ts';
 import type { StickBand } from '../stick-bands.ts';
@@ -10,6 +9,7 @@ import { Lath } from './lath.tsx';
 import { ShareCurve } from './share-curve.tsx';
 import { SvgWords } from './svg-words.tsx';
 import { TapeRuler } from './tape-ruler.tsx';
+import { shortName } from '@/lib/short-name.ts';
 
 interface GroundProps {
   layout: BoardLayout;
@@ -94,7 +94,7 @@ export const BoardNames = memo(function BoardNames({ layout, rows }: Pick<Ground
           </g>
         )}
         <text x={narrow ? 0 : 24} y={y} fontSize={narrow ? 14 : 15} fontWeight={500} fill="var(--color-ink)">
-          {firstName(name)}{' '}
+          {shortName(name)}{' '}
           <tspan fontWeight={400} fill="var(--color-ink-2)">
             <SvgWords text={words} />
           </tspan>

@@ -1,6 +1,7 @@
 import { type StoryStick, type Dimension } from '@settlewright/geometry';
 import { memo, useMemo } from 'react';
 import { Measure } from '@/components/measure.tsx';
+import { withKnownDifference } from '@/lib/known-difference.ts';
 import { useSession } from '@/lib/session.ts';
 import { exactValue, joinWords, markWords } from '@/lib/dimension-words.ts';
 import { useChoices } from '../choices-view.ts';
@@ -65,15 +66,8 @@ export const Decision = memo(function Decision({
     lost.length === 0 ? '' : `; ${joinWords(lost.map((line) => line.replace(/, .*$/, '')))} won’t fit`;
   const difference = `${dimension.label} kept at ${now} (${movingWords(dimension)})${losing}.`;
   const keep = (reason: string) => {
-    const note = {
-      id: crypto.randomUUID(),
-      text: difference,
-      ...(reason ? { reason } : {}),
-      ...(by ? { by } : {}),
-      on: new Date().toISOString().slice(0, 10),
-    };
     replace?.(
-      { ...document, knownDifferences: [...document.knownDifferences, note] },
+      withKnownDifference(document, { text: difference, reason, by }),
       `${dimension.label} kept at ${now}`,
     );
   };

@@ -1,11 +1,11 @@
 import type { Dimension } from '@settlewright/geometry';
 import { memo } from 'react';
-import { firstName } from '@/lib/dimension-words.ts';
 import { tapeTicks } from '../board-layout.ts';
 import type { CastMap, Region } from '../cast-map.ts';
 import { useChoices } from '../choices-view.ts';
 import { contours } from '../contours.ts';
 import { inHundred } from '../words.ts';
+import { shortName } from '@/lib/short-name.ts';
 
 interface MapDrawingProps {
   map: CastMap;
@@ -254,6 +254,6 @@ function placeNames(
     }
     if (!best) return [];
     taken.push(best.at);
-    return [{ name: firstName(name), at: best.at }];
+    return [{ name: shortName(name), at: best.at }];
   });
 }

@@ -7,15 +7,15 @@ import { Select } from '@/components/select.tsx';
 import { RuleHeading } from '@/components/rule-heading.tsx';
 import { crowdWords, type CrowdChoice } from '@/lib/crowd/crowds.ts';
 import { useWidth } from '@/lib/use-width.ts';
-import { exactValue, firstName } from '@/lib/dimension-words.ts';
+import { exactValue, dimensionWords } from '@/lib/dimension-words.ts';
 import { bestPairs, type BestPair, type CastMap } from '../cast-map.ts';
 import { useChoices } from '../choices-view.ts';
 import type { TriedValues } from '../tried-values.ts';
 import type { AskedCrowd } from '../use-crowd.ts';
 import { useCastMap } from '../use-cast-map.ts';
-import { dimensionWords } from '../words.ts';
 import { BestPairs } from './best-pairs.tsx';
 import { MapDrawing } from './map-drawing.tsx';
+import { shortName } from '@/lib/short-name.ts';
 
 interface TwoDimensionsProps {
   tried: TriedValues;
@@ -133,7 +133,7 @@ function MapWords({ map: { regions, ruleIds } }: { map: CastMap }) {
         ({ placeId, name, blockedBy }) =>
           blockedBy && (
             <p key={placeId} className="text-wont">
-              {firstName(name)} fits nowhere here: even at best {check(blockedBy)} won’t do.
+              {shortName(name)} fits nowhere here: even at best {check(blockedBy)} won’t do.
             </p>
           ),
       )}

@@ -1,9 +1,10 @@
 import type { SitterRow } from '@settlewright/anthropometry';
 import { SitterDot } from '@/components/sitter-dot.tsx';
 import { Verdict, VerdictCounts } from '@/components/verdict.tsx';
-import { checkName, shortName } from '../amounts.ts';
+import { checkName } from '../amounts.ts';
 import { useFitView } from '../fit-view.ts';
 import { CountedApart } from './counted-apart.tsx';
+import { shortName } from '@/lib/short-name.ts';
 
 function WorstOf({ row }: { row: SitterRow }) {
   const { ruleBook } = useFitView();

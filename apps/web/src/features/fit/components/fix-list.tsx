@@ -2,9 +2,10 @@ import type { FitCell } from '@settlewright/anthropometry';
 import { formatAngle, formatLength, type CellChange, type CellState, type Fix } from '@settlewright/geometry';
 import { useId } from 'react';
 import { verdictWord } from '@/components/verdict.tsx';
-import { checkName, shortName } from '../amounts.ts';
+import { checkName } from '../amounts.ts';
 import { useFitView, type FitView } from '../fit-view.ts';
 import { useFixes } from '../use-fixes.ts';
+import { shortName } from '@/lib/short-name.ts';
 
 function stateWords(state: CellState): string {
   if (state === 'inside' || state === 'outside') return `${state} the clause`;

@@ -3,10 +3,10 @@ import { Fragment } from 'react';
 import { RuleHeading } from '@/components/rule-heading.tsx';
 import { SitterDot } from '@/components/sitter-dot.tsx';
 import { settlesWords } from '@/lib/settles-words.ts';
-import { shortName } from '../amounts.ts';
 import { useFitView } from '../fit-view.ts';
 import { useNextMeasures } from '../next/use-next-measures.ts';
 import { MeasureLink } from './measure-link.tsx';
+import { shortName } from '@/lib/short-name.ts';
 
 function Order({ row, next }: { row: SitterRow; next: NextMeasures }) {
   return next.order.map(({ key }, index) => (

@@ -1,5 +1,6 @@
 import { createBodyModel, type NextMeasures } from '@settlewright/anthropometry';
 import summary from '@settlewright/seed-data/populations/ansur2.json';
+import type { Reply } from '@/lib/ask-worker.ts';
 import { answerNext, type NextQuestion } from './next-question.ts';
 
 export interface NumberedQuestion {
@@ -7,12 +8,10 @@ export interface NumberedQuestion {
   question: NextQuestion;
 }
 
-export type Reply = { id: number } & ({ answer: NextMeasures } | { fault: string });
-
 const model = createBodyModel(summary);
 
 self.onmessage = ({ data: { id, question } }: MessageEvent<NumberedQuestion>) => {
-  let reply: Reply;
+  let reply: Reply<NextMeasures>;
   try {
     reply = { id, answer: answerNext(question, model) };
   } catch (fault) {

@@ -5,7 +5,8 @@ import {
   type StandInCheck,
 } from '@settlewright/anthropometry';
 import { formatMass, type LengthStyle } from '@settlewright/geometry';
-import { amountText, shortName } from '../amounts.ts';
+import { amountText } from '../amounts.ts';
+import { shortName } from '@/lib/short-name.ts';
 
 /** Whom a sentence is about; without a name the one who tries is "the stand-in". */
 export interface Pair {

@@ -9,11 +9,11 @@ import { copyAsSet } from '../api.ts';
 import { useAutosave, useSurroundings } from '../room-context.tsx';
 import { timeWords } from '@/lib/dates.ts';
 import type { DraftConflict } from '../save/autosave.ts';
-import { shortName } from '../sitters.ts';
 import { useRoom } from '../store.ts';
 import { changedVerdicts } from '../verdict-words.ts';
 import { ConflictChoice } from './conflict-choice.tsx';
 import { nameOf, sayValue, type Side, type WordsOf } from './conflict-words.ts';
+import { shortName } from '@/lib/short-name.ts';
 
 /** Two people edited: what only one changed is kept, what both changed is chosen, nothing by itself. */
 export function ConflictScreen({ conflict }: { conflict: DraftConflict }) {

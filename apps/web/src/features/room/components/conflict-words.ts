@@ -8,7 +8,8 @@ import {
 } from '@settlewright/geometry';
 import type { CastMember } from '@/lib/contract.ts';
 import { showNumber } from '../numbers.ts';
-import { shortName, sitterName } from '../sitters.ts';
+import { sitterName } from '../sitters.ts';
+import { shortName } from '@/lib/short-name.ts';
 
 export type Side = 'mine' | 'theirs';
 

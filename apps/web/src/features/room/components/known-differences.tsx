@@ -5,6 +5,7 @@ import { Dialog } from '@/components/dialog.tsx';
 import { RuleHeading } from '@/components/rule-heading.tsx';
 import { TextArea } from '@/components/text-field.tsx';
 import { dayWords } from '@/lib/dates.ts';
+import { withKnownDifference } from '@/lib/known-difference.ts';
 import { useSession } from '@/lib/session.ts';
 import { useSurroundings } from '../room-context.tsx';
 
@@ -117,15 +118,8 @@ function AddDifference({ document, onReplace }: Props) {
       onSubmit={(event) => {
         event.preventDefault();
         if (text.trim() === '') return;
-        const added = {
-          id: crypto.randomUUID(),
-          text: text.trim(),
-          ...(reason.trim() ? { reason: reason.trim() } : {}),
-          ...(by ? { by } : {}),
-          on: new Date().toISOString().slice(0, 10),
-        };
         onReplace(
-          { ...document, knownDifferences: [...document.knownDifferences, added] },
+          withKnownDifference(document, { text: text.trim(), reason: reason.trim(), by }),
           'Known difference added',
         );
         setText('');

@@ -12,9 +12,10 @@ import { Button } from '@/components/button.tsx';
 import { Menu } from '@/components/menu.tsx';
 import type { PieceActions } from '../hooks/use-piece-actions.ts';
 import { useSurroundings } from '../room-context.tsx';
-import { shortName, sitterName } from '../sitters.ts';
+import { sitterName } from '../sitters.ts';
 import { NumbersDialog } from './numbers-dialog.tsx';
 import { PlacesDialog } from './places-dialog.tsx';
+import { shortName } from '@/lib/short-name.ts';
 
 interface Props {
   piece: Piece;

@@ -13,9 +13,10 @@ import {
 } from '@settlewright/geometry';
 import { useMemo } from 'react';
 import { useSurroundings } from '../room-context.tsx';
-import { shortName, sitterName } from '../sitters.ts';
+import { sitterName } from '../sitters.ts';
 import { useRoomStore } from '../store.ts';
 import { useTakeStep } from './use-take-step.ts';
+import { shortName } from '@/lib/short-name.ts';
 
 export const KIND_WORDS: Record<PieceKind, string> = {
   bench: 'bench',

@@ -4,12 +4,12 @@ import { classNames } from '@/components/class-names.ts';
 import { Measure } from '@/components/measure.tsx';
 import type { SeatedBody } from '../picture.ts';
 import { useSurroundings } from '../room-context.tsx';
-import { shortName } from '../sitters.ts';
 import type { ViewController } from '../scene/view-controller.ts';
 import { mix } from '../scene/vectors.ts';
 import { placeFlags, placeNames, placeNamesAtHeads, tapePath, type Blob } from './layout.ts';
 import { TapeFlag } from './tape-flag.tsx';
 import { tapeTone } from './tape-words.ts';
+import { shortName } from '@/lib/short-name.ts';
 
 interface Props {
   controller: ViewController;

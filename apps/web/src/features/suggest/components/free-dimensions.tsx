@@ -2,10 +2,9 @@ import type { Dimension } from '@settlewright/geometry';
 import { Disclosure } from '@/components/disclosure.tsx';
 import { Measure } from '@/components/measure.tsx';
 import { RuleHeading } from '@/components/rule-heading.tsx';
-import { dimensionValue } from '@/lib/dimension-words.ts';
+import { dimensionValue, dimensionWords } from '@/lib/dimension-words.ts';
 import { clashOf, MOST_FREE, startFreedom, type SearchForm } from '../search-form.ts';
 import { useSuggestView } from '../suggest-view.ts';
-import { dimensionWords } from '../words.ts';
 import { FreedomFields } from './freedom-fields.tsx';
 
 interface FreeDimensionsProps {

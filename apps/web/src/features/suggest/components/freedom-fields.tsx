@@ -1,12 +1,12 @@
-import { formatAngle, parseAngle, type Dimension } from '@settlewright/geometry';
+import { lengthStep, formatAngle, parseAngle, type Dimension } from '@settlewright/geometry';
 import { LengthField } from '@/components/length-field.tsx';
 import { Measure } from '@/components/measure.tsx';
 import type { QuantityEntry } from '@/components/quantity-entry.ts';
 import { QuantityField, type Reading } from '@/components/quantity-field.tsx';
 import { Select } from '@/components/select.tsx';
-import { dimensionValue } from '@/lib/dimension-words.ts';
+import { dimensionValue, dimensionStep } from '@/lib/dimension-words.ts';
 import { useState } from 'react';
-import { startFreedom, stepOf, type Freedom } from '../search-form.ts';
+import { startFreedom, type Freedom } from '../search-form.ts';
 import { useSuggestView } from '../suggest-view.ts';
 
 interface FreedomFieldsProps {
@@ -100,7 +100,7 @@ function End({ label, unit, value, min, max, onChange }: EndProps) {
       {...field}
       show={(of) => dimensionValue(of, unit, style)}
       read={read}
-      step={stepOf(unit, style)}
+      step={dimensionStep(unit, lengthStep(style))}
       description={
         <Measure text={`${dimensionValue(min, unit, style)} to ${dimensionValue(max, unit, style)}`} />
       }

@@ -2,10 +2,11 @@ import { useState } from 'react';
 import { Button } from '@/components/button.tsx';
 import { RuleHeading } from '@/components/rule-heading.tsx';
 import { TextArea } from '@/components/text-field.tsx';
+import { withKnownDifference } from '@/lib/known-difference.ts';
 import { useSession } from '@/lib/session.ts';
 import type { Move } from '../effects.ts';
 import { useSuggestView } from '../suggest-view.ts';
-import { differenceWords, withDifference } from '../words.ts';
+import { differenceWords } from '../words.ts';
 
 /** Keep the look knowingly: what was not taken, and why, stands in the known differences. */
 export function KeepLook({ moves }: { moves: readonly Move[] }) {
@@ -25,9 +26,8 @@ export function KeepLook({ moves }: { moves: readonly Move[] }) {
         onSubmit={(event) => {
           event.preventDefault();
           if (text === '') return;
-          const on = new Date().toISOString().slice(0, 10);
-          const said = { id: crypto.randomUUID(), text, reason: reason.trim(), by, on };
-          replace(withDifference(document, said), 'Known difference added');
+          const said = { text, reason: reason.trim(), by };
+          replace(withKnownDifference(document, said), 'Known difference added');
           setKept(true);
           setReason('');
         }}

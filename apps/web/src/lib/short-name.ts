@@ -1,0 +1,9 @@
+/** "The stand-in", "removed sitter 2": words for somebody, not a first name and another. */
+const NOT_A_FIRST_NAME = /^(the|removed) /i;
+
+/** First name for lines where room is short; a mannequin keeps "Woman, 5th". */
+export function shortName(name: string): string {
+  const [mannequin] = /^(Woman|Man), \d+\w\w/.exec(name) ?? [];
+  if (mannequin !== undefined) return mannequin;
+  return NOT_A_FIRST_NAME.test(name) ? name : (name.split(' ')[0] ?? name);
+}
