@@ -5,9 +5,11 @@ import { logParameters } from './common/request-log';
 import { settings, workerSettings } from './config/settings';
 import { DatabaseModule } from './database/database.module';
 import { StudyCountingModule } from './studies/study-counting.module';
-import { StudyWorker } from './studies/study-worker';
+import { StudyWork } from './studies/study-work';
+import { JobWorker, type Work } from './jobs/job-worker';
+import { Jobs } from './jobs/jobs.service';
 
-/** A process that counts studies and answers no requests. */
+/** A process that counts studies and searches for dimensions, and answers no requests. */
 @Module({
   imports: [
     ConfigModule.forRoot({ isGlobal: true, ignoreEnvFile: true, load: [workerSettings] }),
@@ -18,6 +20,13 @@ import { StudyWorker } from './studies/study-worker';
     DatabaseModule,
     StudyCountingModule,
   ],
-  providers: [StudyWorker],
+  providers: [
+    StudyWork,
+    {
+      provide: JobWorker,
+      inject: [Jobs, StudyWork],
+      useFactory: (jobs: Jobs, ...kinds: Work[]) => new JobWorker(jobs, kinds),
+    },
+  ],
 })
 export class WorkerModule {}

@@ -31,6 +31,14 @@ export async function startTestApp(
     webDist: null,
     ...changes,
   };
+  return startAppOn(config, adapt);
+}
+
+/** One more process of the application, with the settings and so the database of another. */
+export async function startAppOn(
+  config: Settings,
+  adapt: (builder: TestingModuleBuilder) => TestingModuleBuilder = (builder) => builder,
+): Promise<TestApp> {
   const builder = Test.createTestingModule({ imports: [AppModule] })
     .overrideProvider(settings.KEY)
     .useValue(config);

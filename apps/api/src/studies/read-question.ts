@@ -15,7 +15,11 @@ export function readQuestion(
   dto: StartStudyDto,
   document: SetDocument,
   crowd: CrowdData,
-  { blockPeople, ruleVersion }: Pick<StudyQuestion, 'blockPeople' | 'ruleVersion'>,
+  {
+    blockPeople,
+    ruleVersion,
+    workVersion,
+  }: Pick<StudyQuestion, 'blockPeople' | 'ruleVersion' | 'workVersion'>,
 ): StudyQuestion {
   const { places } = measureSet(document);
   const groups = crowdFrom(crowd).groups.map(({ group }) => group);
@@ -28,6 +32,7 @@ export function readQuestion(
   const { people, ruleIds, placeIds } = dto;
   const { lensHeightMm } = document.asked;
   return {
+    workVersion,
     ruleVersion,
     crowd,
     ...(groups.length > 1 ? { womenShare: (dto.womenPercent ?? EVENLY) / WHOLE } : {}),

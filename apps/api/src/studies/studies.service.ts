@@ -6,6 +6,7 @@ import { AuditService } from '../audit/audit.service';
 import type { MemberInfo } from '../common/access.decorator';
 import { Problem } from '../common/problem';
 import { InjectSettings, type Settings } from '../config/settings';
+import { WorkVersion } from '../jobs/work-version';
 import { crowdFrom } from '../populations/crowd-data';
 import { PopulationsService } from '../populations/populations.service';
 import { DraftsService } from '../sets/drafts.service';
@@ -43,6 +44,7 @@ export class StudiesService {
     private readonly counter: StudyCounter,
     private readonly blocks: StudyBlocks,
     private readonly queue: StudyQueue,
+    private readonly version: WorkVersion,
     private readonly audit: AuditService,
   ) {}
 
@@ -54,6 +56,7 @@ export class StudiesService {
     const question = readQuestion(dto, document, crowd, {
       blockPeople: this.config.studyBlockPeople,
       ruleVersion: this.counter.ruleBook.version,
+      workVersion: this.version.own,
     });
     const study = this.begun(member, setId, dto, question);
     const atOnce = study.blocks === 1 && estimatedMs(question) <= this.config.studyAtOnceMs;
@@ -170,7 +173,10 @@ export class StudiesService {
     return this.studies.manager.transaction(async (manager) => {
       await refuseTooMany(manager, member.workshopId);
       const { id, blocks } = await manager.save(study);
-      await this.queue.add(manager, id, blocks);
+      await this.queue.add(
+        manager,
+        Array.from({ length: blocks }, (_, block) => ({ studyId: id, block })),
+      );
       await this.record(manager, member, 'study.started', id, { people: question.people });
       return id;
     });

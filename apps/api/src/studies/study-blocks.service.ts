@@ -2,6 +2,8 @@ import type { PartialStudy } from '@settlewright/anthropometry';
 import { Injectable } from '@nestjs/common';
 import { InjectDataSource } from '@nestjs/typeorm';
 import { DataSource, type EntityManager } from 'typeorm';
+import { ABANDONED, abandonedIds } from '../jobs/abandoned';
+import { WorkVersion } from '../jobs/work-version';
 import { studyCrowd, type StudyQuestion } from './study-question';
 import { resultOf } from './count-block';
 import { StudyBlock } from './entities/study-block.entity';
@@ -10,7 +12,10 @@ import { Study, UNFINISHED } from './entities/study.entity';
 /** Keeps what was counted, each block once, and puts the study together when the last one is in. */
 @Injectable()
 export class StudyBlocks {
-  constructor(@InjectDataSource() private readonly dataSource: DataSource) {}
+  constructor(
+    @InjectDataSource() private readonly dataSource: DataSource,
+    private readonly version: WorkVersion,
+  ) {}
 
   /** What is to be counted; nothing when the study is gone, ended, or has this block already. */
   async question(studyId: string, block: number): Promise<StudyQuestion | undefined> {
@@ -54,6 +59,13 @@ export class StudyBlocks {
         await this.end(manager, studyId, { state: 'failed', fault });
       }
     });
+  }
+
+  /** Studies that no worker of their version came for. */
+  async failAbandoned(): Promise<void> {
+    for (const id of await abandonedIds(this.dataSource.manager, Study, this.version.own)) {
+      await this.fail(id, ABANDONED);
+    }
   }
 
   /** Part of the caller's transaction: the study is over, and what was only needed to count it goes. */

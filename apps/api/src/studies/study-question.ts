@@ -13,6 +13,8 @@ export const STUDY_WEAR = { women: CROWD_WEAR, men: CROWD_WEAR };
 
 /** All that a block is counted from. Frozen when the study begins: drafts and populations may change meanwhile. */
 export interface StudyQuestion {
+  /** Version of the work, so that all blocks are counted alike. */
+  workVersion: string;
   /** Version of the fit rules that everybody counts with. */
   ruleVersion: string;
   crowd: CrowdData;

@@ -1,6 +1,10 @@
 import { type ChildProcess, spawn } from 'node:child_process';
 import { once } from 'node:events';
 import { join } from 'node:path';
+import { Test } from '@nestjs/testing';
+import { settings } from '../../src/config/settings';
+import { WorkVersion } from '../../src/jobs/work-version';
+import { WorkerModule } from '../../src/worker.module';
 import type { TestApp } from '../test-app';
 
 /** For so long a block is a worker's in these tests. */
@@ -55,4 +59,16 @@ export class WorkerProcess {
     }
     return { code: child.exitCode, signal: child.signalCode };
   }
+}
+
+/** A worker of another version of the programme, in this process. */
+export async function startWorkerOf(own: string, test: TestApp): Promise<{ close(): Promise<void> }> {
+  const module = await Test.createTestingModule({ imports: [WorkerModule] })
+    .overrideProvider(settings.KEY)
+    .useValue(test.settings)
+    .overrideProvider(WorkVersion)
+    .useValue({ own })
+    .compile();
+  module.useLogger(false);
+  return module.init();
 }
