@@ -2,6 +2,7 @@ import type { PieceOf } from '../room/document.ts';
 import { benchLayout } from '../pieces/bench-layout.ts';
 import { MM_PER_INCH } from '../units/length-style.ts';
 import { clipped, extent, type PlanOutline, type PlanSolid } from './plan.ts';
+import { nearestOnSide } from './plan-distance.ts';
 import { planOfPiece, solidsNear, type Survey } from './survey.ts';
 
 /** What hangs higher than this is in nobody's way on the floor, millimetres: 80 in, ADA 307.4 (from memory). */
@@ -44,13 +45,10 @@ function distanceToOrigin(outline: PlanOutline): number {
   let [left, right] = [false, false];
   outline.forEach(([x, z], i) => {
     const [nx, nz] = outline[(i + 1) % outline.length] ?? [x, z];
-    const [dx, dz] = [nx - x, nz - z];
-    const cross = dx * z - dz * x;
+    const cross = (nx - x) * z - (nz - z) * x;
     if (cross > 0) left = true;
     if (cross < 0) right = true;
-    const length2 = dx * dx + dz * dz;
-    const t = length2 === 0 ? 0 : Math.min(1, Math.max(0, -(x * dx + z * dz) / length2));
-    nearest = Math.min(nearest, Math.hypot(x + t * dx, z + t * dz));
+    nearest = Math.min(nearest, Math.hypot(...nearestOnSide([0, 0], [x, z], [nx, nz])));
   });
   return left && right ? nearest : 0;
 }

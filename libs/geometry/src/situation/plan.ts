@@ -1,7 +1,7 @@
 import type { Part } from '../parts/part.ts';
 
 /** A point seen from above: two level axes, millimetres. */
-type PlanPoint = readonly [number, number];
+export type PlanPoint = readonly [number, number];
 
 /** A convex outline seen from above. */
 export type PlanOutline = readonly PlanPoint[];
@@ -98,6 +98,18 @@ export function inFrame(outline: PlanOutline, frame: PlanFrame): PlanOutline {
     const [dx, dz] = [x - frame.xMm, z - frame.zMm];
     return [dx * c - dz * s, dx * s + dz * c] as const;
   });
+}
+
+/**
+ * Takes an outline from a frame back into the room.
+ *
+ * @param outline - in the frame's two axes
+ * @param frame - origin and facing
+ * @returns the outline in the room's x and z
+ */
+export function outOfFrame(outline: PlanOutline, frame: PlanFrame): PlanOutline {
+  const [c, s] = [Math.cos(frame.facingRad), Math.sin(frame.facingRad)];
+  return outline.map(([left, ahead]) => [frame.xMm + left * c + ahead * s, frame.zMm - left * s + ahead * c]);
 }
 
 /** A window in a frame; an open side is infinite. */

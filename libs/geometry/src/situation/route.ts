@@ -1,6 +1,7 @@
 import type { RouteStretch } from '@settlewright/anthropometry';
 import { isInTheWay, type Spot } from './clear-floor.ts';
-import { clipped, extent, type PlanSolid } from './plan.ts';
+import { legsOf, pinchesOf, type Pinch } from './pinches.ts';
+import { clipped, extent, type PlanFrame, type PlanSolid } from './plan.ts';
 import { solidsNear, type Survey } from './survey.ts';
 
 /** Widths are taken this often along a route, millimetres. */
@@ -12,9 +13,13 @@ const TURN_STEP_RAD = Math.PI / 18;
 const TURN_HALF_MM = 50;
 /** Widths this close are one stretch. */
 const SAME_MM = 0.5;
+/** Of a step: what is nearer to its end than this is at its end. */
+const TOUCHING = 1e-6;
+const ROOM: PlanFrame = { xMm: 0, zMm: 0, facingRad: 0 };
 
 /**
- * Clear width along a route: at each step what is free to the left and to the right of its line.
+ * Clear width along a route: at each step what is free to the left and to the right of its line, and no more than the
+ * least distance between two things that it leads between.
  *
  * @param found - the survey
  * @param corners - corners of the route's line, at least two
@@ -22,28 +27,39 @@ const SAME_MM = 0.5;
  */
 export function routeStretches(found: Survey, corners: readonly Spot[]): RouteStretch[] {
   const stretches: RouteStretch[] = [];
-  corners.slice(1).forEach((to, i) => {
-    const from = corners[i] ?? to;
-    const length = Math.hypot(to.xMm - from.xMm, to.zMm - from.zMm);
-    if (length === 0) return;
-    const facingRad = headingOf(from, to);
-    const before = corners[i - 1];
+  const legs = legsOf(corners);
+  const pinches = pinchesOf(
+    legs,
+    solidsNear(found, ROOM, Infinity, () => true, isInTheWay),
+    2 * WIDEST_HALF_MM,
+  );
+  legs.forEach(({ plan, lengthMm }, leg) => {
+    const before = legs[leg - 1];
     if (before !== undefined) {
-      const widthMm = turnWidth(found, from, headingOf(before, from), facingRad);
+      const widthMm = turnWidth(found, plan, before.plan.facingRad, plan.facingRad);
       add(stretches, { widthMm, lengthMm: STEP_MM });
     }
-    const plan = { ...from, facingRad };
-    const near = solidsNear(found, plan, length + WIDEST_HALF_MM, () => true, isInTheWay);
-    const steps = Math.max(1, Math.ceil(length / STEP_MM));
-    for (let n = 0; n < steps; n += 1) {
-      const ahead = [(n * length) / steps, ((n + 1) * length) / steps] as const;
-      add(stretches, { widthMm: clearWidth(near, ahead), lengthMm: length / steps });
-    }
+    const near = solidsNear(found, plan, lengthMm + WIDEST_HALF_MM, () => true, isInTheWay);
+    const steps = Math.max(1, Math.ceil(lengthMm / STEP_MM));
+    const widths = Array.from({ length: steps }, (_, n) =>
+      clearWidth(near, [(n * lengthMm) / steps, ((n + 1) * lengthMm) / steps]),
+    );
+    for (const pinch of pinches) if (pinch.leg === leg) narrow(widths, pinch, lengthMm / steps);
+    for (const widthMm of widths) add(stretches, { widthMm, lengthMm: lengthMm / steps });
   });
   return stretches;
 }
 
-const headingOf = (from: Spot, to: Spot): number => Math.atan2(to.xMm - from.xMm, to.zMm - from.zMm);
+/** Narrows the steps between the two sides of a pinch; of two steps that meet where it is, the narrower. */
+function narrow(widths: number[], { fromMm, toMm, widthMm }: Pinch, stepMm: number): void {
+  const first = Math.min(widths.length - 1, Math.floor(fromMm / stepMm + TOUCHING));
+  const last = Math.max(0, Math.ceil(toMm / stepMm - TOUCHING) - 1);
+  const covered =
+    first <= last
+      ? widths.slice(first, last + 1).map((_, n) => first + n)
+      : [(widths[last] ?? Infinity) <= (widths[first] ?? Infinity) ? last : first];
+  for (const n of covered) widths[n] = Math.min(widths[n] ?? Infinity, widthMm);
+}
 
 /** Least width across a turn about a corner, from one heading to the next. */
 function turnWidth(found: Survey, corner: Spot, from: number, to: number): number {
