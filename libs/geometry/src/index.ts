@@ -73,6 +73,18 @@ export {
   type SuggestInput,
   type Tried,
 } from './choices/candidates.ts';
+export { bestPairs, castMap, gridValues } from './choices/cast-map.ts';
+export type { BestPair, CastMap, MapRegion } from './choices/cast-map.ts';
+export { changingPlaces, measuredPlaces } from './choices/places-along.ts';
+export { stickBands, type StickBand } from './choices/stick-bands.ts';
+export { orderedRows } from './choices/row-order.ts';
+export {
+  dimensionStep,
+  dimensionValue,
+  dimensionWords,
+  exactValue,
+  markWords,
+} from './choices/dimension-words.ts';
 export { judgeChoices, type Judging, type Served } from './choices/judge-choices.ts';
 export { suggestDimensions } from './choices/suggest-dimensions.ts';
 export type { Answer, AnswerKind, Blame, Suggestion } from './choices/suggest-dimensions.ts';

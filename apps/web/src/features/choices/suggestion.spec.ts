@@ -1,7 +1,7 @@
-import type { StickRow, Stretch } from '@settlewright/geometry';
+import { orderedRows, type StickRow, type Stretch } from '@settlewright/geometry';
 import { describe, expect, it } from 'vitest';
 import { commonWords, countsWords } from './common-words.ts';
-import { bestValue, furthestApart, orderedRows, seatElsewhere } from './suggestion.ts';
+import { bestValue, furthestApart, seatElsewhere } from './suggestion.ts';
 
 const INCH = 25.4;
 const inches = ([from, to]: readonly [number, number]): Stretch => ({ from: from * INCH, to: to * INCH });

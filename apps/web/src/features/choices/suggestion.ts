@@ -74,12 +74,3 @@ export function furthestApart(rows: readonly StickRow[]): { low: StickRow; high:
   const [high] = [...told].sort((a, b) => footOf(b) - footOf(a));
   return low && high && topOf(low) < footOf(high) ? { low, high } : undefined;
 }
-
-/** Highest band first; who fits nowhere comes last. */
-export function orderedRows(rows: readonly StickRow[]): StickRow[] {
-  const middle = ({ tight }: StickRow) => {
-    const [first, last] = [tight[0], tight.at(-1)];
-    return first && last ? (first.from + last.to) / 2 : -Infinity;
-  };
-  return [...rows].sort((a, b) => middle(b) - middle(a));
-}

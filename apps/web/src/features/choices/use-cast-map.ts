@@ -2,10 +2,10 @@ import { dimensionOf, lengthStep, type Dimension } from '@settlewright/geometry'
 import { useEffect, useMemo, useState } from 'react';
 import { askCrowd } from '@/lib/crowd/ask-crowd.ts';
 import type { CrowdRequest } from '@/lib/crowd/crowd-people.ts';
-import { castMap, gridValues, type CastMap } from './cast-map.ts';
+import { castMap, gridValues, type CastMap } from '@settlewright/geometry';
 import { useChoices } from './choices-view.ts';
 import { inSlices } from './in-slices.ts';
-import { changingPlaces } from './places-along.ts';
+import { changingPlaces } from '@settlewright/geometry';
 import { type TriedValues } from './tried-values.ts';
 import { dimensionStep } from '@/lib/dimension-words.ts';
 

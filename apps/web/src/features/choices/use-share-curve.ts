@@ -4,7 +4,7 @@ import type { CrowdTold, CurveShare } from '@/lib/crowd/crowd-tasks.ts';
 import type { CrowdRequest } from '@/lib/crowd/crowd-people.ts';
 import { useChoices } from './choices-view.ts';
 import { inSlices } from './in-slices.ts';
-import { changingPlaces, measuredPlaces } from './places-along.ts';
+import { changingPlaces, measuredPlaces } from '@settlewright/geometry';
 import type { TriedValues } from './tried-values.ts';
 
 /** People who are asked: the answer is good to about one in a hundred. */

@@ -1,9 +1,9 @@
-import type { StickRow, StoryStick } from '@settlewright/geometry';
+import { orderedRows, type StickRow, type StoryStick } from '@settlewright/geometry';
 import { useCallback, useMemo, useState } from 'react';
 import { exactValue } from '@/lib/dimension-words.ts';
 import { answerAt, type Answer } from './answers.ts';
 import { useChoices } from './choices-view.ts';
-import { bestValue, orderedRows } from './suggestion.ts';
+import { bestValue } from './suggestion.ts';
 import type { TriedValues } from './tried-values.ts';
 import { EVERY_CHECK } from './use-stick-address.ts';
 

@@ -2,7 +2,7 @@ import type { Dimension } from '@settlewright/geometry';
 import { Button } from '@/components/button.tsx';
 import { Measure } from '@/components/measure.tsx';
 import { aboutInHundred, exactValue, joinWords } from '@/lib/dimension-words.ts';
-import type { BestPair, CastMap } from '../cast-map.ts';
+import type { BestPair, CastMap } from '@settlewright/geometry';
 import { useChoices } from '../choices-view.ts';
 import { shortName } from '@/lib/short-name.ts';
 

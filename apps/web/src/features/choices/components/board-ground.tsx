@@ -3,7 +3,7 @@ import { memo } from 'react';
 import { SitterDot } from '@/components/sitter-dot.tsx';
 import { BAND_HEIGHT, tapeTicks, type BoardLayout } from '../board-layout.ts';
 import { useChoices } from '../choices-view.ts';
-import type { StickBand } from '../stick-bands.ts';
+import type { StickBand } from '@settlewright/geometry';
 import type { ShareCurves } from '../use-share-curve.ts';
 import { Lath } from './lath.tsx';
 import { ShareCurve } from './share-curve.tsx';

@@ -1,7 +1,7 @@
 import type { Dimension } from '@settlewright/geometry';
 import { memo } from 'react';
 import { tapeTicks } from '../board-layout.ts';
-import type { CastMap, Region } from '../cast-map.ts';
+import type { CastMap, MapRegion } from '@settlewright/geometry';
 import { useChoices } from '../choices-view.ts';
 import { contours } from '../contours.ts';
 import { inHundred } from '../words.ts';
@@ -235,7 +235,7 @@ function Axis({
 
 /** Each name inside its own region, away from the names before it. */
 function placeNames(
-  regions: readonly Region[],
+  regions: readonly MapRegion[],
   placeOf: (i: number, j: number) => [number, number],
   { right, bottom }: { right: number; bottom: number },
 ): { name: string; at: [number, number] }[] {

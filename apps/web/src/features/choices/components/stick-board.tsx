@@ -4,7 +4,7 @@ import { exactValue } from '@/lib/dimension-words.ts';
 import type { Answer } from '../answers.ts';
 import type { BoardLayout } from '../board-layout.ts';
 import { useChoices } from '../choices-view.ts';
-import type { StickBand } from '../stick-bands.ts';
+import type { StickBand } from '@settlewright/geometry';
 import type { ShareCurves } from '../use-share-curve.ts';
 import { BoardGround, BoardNames } from './board-ground.tsx';
 import { BoardLines } from './board-lines.tsx';

@@ -7,7 +7,7 @@ import { aboutInHundred, dimensionValue } from '@/lib/dimension-words.ts';
 import { boardLayout } from '../board-layout.ts';
 import { useChoices } from '../choices-view.ts';
 import { commonWords, countsWords } from '../common-words.ts';
-import { stickBands } from '../stick-bands.ts';
+import { stickBands } from '@settlewright/geometry';
 import type { TriedValues } from '../tried-values.ts';
 import type { AskedCrowd } from '../use-crowd.ts';
 import { shareAt, useShareCurves } from '../use-share-curve.ts';

@@ -1,6 +1,6 @@
 import { memo } from 'react';
 import { classNames } from '@/components/class-names.ts';
-import type { StickBand } from '../stick-bands.ts';
+import type { StickBand } from '@settlewright/geometry';
 import { Sentence } from './sentence.tsx';
 
 const SWATCH = 'mr-1.5 inline-block w-8 align-[-2px] border border-rule-strong';

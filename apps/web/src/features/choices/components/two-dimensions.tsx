@@ -8,7 +8,7 @@ import { RuleHeading } from '@/components/rule-heading.tsx';
 import { crowdWords, type CrowdChoice } from '@/lib/crowd/crowds.ts';
 import { useWidth } from '@/lib/use-width.ts';
 import { exactValue, dimensionWords } from '@/lib/dimension-words.ts';
-import { bestPairs, type BestPair, type CastMap } from '../cast-map.ts';
+import { bestPairs, type BestPair, type CastMap } from '@settlewright/geometry';
 import { useChoices } from '../choices-view.ts';
 import type { TriedValues } from '../tried-values.ts';
 import type { AskedCrowd } from '../use-crowd.ts';

@@ -1,7 +1,8 @@
-import { MM_PER_INCH } from '@settlewright/geometry';
 import type { Practice, RuleBook } from '@settlewright/anthropometry';
-import type { LengthStyle, StoryStick, Stretch } from '@settlewright/geometry';
-import { dimensionValue, markWords } from '@/lib/dimension-words.ts';
+import { MM_PER_INCH, type LengthStyle } from '../units/length-style.ts';
+import { dimensionValue, markWords } from './dimension-words.ts';
+import type { StoryStick } from './story-stick.ts';
+import type { Stretch } from './stretches.ts';
 
 /** A range that stands over the tape and decides no sitter's verdict. */
 export interface StickBand {
@@ -18,9 +19,16 @@ function practiceOf(ruleBook: RuleBook, dimensionId: string): Practice | undefin
   return ruleBook.practices.find(({ id }) => id === kind);
 }
 
-/** What is usual, and what code clauses ask of pieces that are marked accessible. */
+/**
+ * What is usual, and what code clauses ask of pieces that are marked accessible.
+ *
+ * @param stick - the stick
+ * @param ruleBook - practices and where rules come from
+ * @param style - how lengths are shown
+ * @returns ranges in the dimension's unit, cut to the values that were tried
+ */
 export function stickBands(
-  { dimension, clauses, values }: StoryStick,
+  { dimension, clauses, values }: Pick<StoryStick, 'dimension' | 'clauses' | 'values'>,
   ruleBook: RuleBook,
   style: LengthStyle,
 ): StickBand[] {

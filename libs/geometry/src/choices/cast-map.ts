@@ -1,11 +1,13 @@
 import type { FitSheet, PlaceSituation, Verdict } from '@settlewright/anthropometry';
-import { measureSet, type Dimension, type SetDocument } from '@settlewright/geometry';
+import type { SetDocument } from '../room/document.ts';
+import { measureSet } from '../situation/measure-set.ts';
+import type { Dimension } from './dimension.ts';
 
 /** What a sitter's worst verdict comes to; what is not known is not served. */
 type Served = 'served' | 'notKnown' | 'lost';
 
 /** Where one sitter is at least tight, over two dimensions. */
-export interface Region {
+export interface MapRegion {
   sitterId: string;
   placeId: string;
   name: string;
@@ -22,14 +24,20 @@ export interface CastMap {
   up: number[];
   /** Rules of a person that were looked at. */
   ruleIds: string[];
-  regions: Region[];
+  regions: MapRegion[];
   placesAt: PlaceSituation[][][];
 }
 
 const ACROSS = 20;
 const FAR = 300;
 
-/** Values along a dimension that a map tries: multiples of the rounding step, about twenty. */
+/**
+ * Values along a dimension that a map tries: multiples of the rounding step, about twenty.
+ *
+ * @param range - ends of the dimension, in its unit
+ * @param step - rounding step, same unit, above 0
+ * @returns rising values
+ */
 export function gridValues({ min, max }: Pick<Dimension, 'min' | 'max'>, step: number): number[] {
   const wide = step * Math.max(1, Math.ceil((max - min) / step / ACROSS - 1e-6));
   const values: number[] = [];
@@ -51,6 +59,7 @@ type Said = Map<string, { margin: number; verdict: Verdict }>;
 /**
  * Tries every pair of values.
  *
+ * @param input - the values of both dimensions; the set at a pair of them; the check of a set; and the rules to look at
  * @returns a generator that yields how many points were tried and returns the map
  */
 export function* castMap({
@@ -82,7 +91,7 @@ export function* castMap({
   );
   const all = movingRules(answers.map((grid) => grid.flat()));
   const moving = shown ? new Set([...all].filter((ruleId) => shown.has(ruleId))) : all;
-  const regions = people.flatMap(({ sitterId, placeId, name }, n): Region[] => {
+  const regions = people.flatMap(({ sitterId, placeId, name }, n): MapRegion[] => {
     const grid = answers[n] ?? [];
     const asked = askedOf(grid.flat(), moving);
     if (asked.size === 0) return [];
@@ -161,7 +170,14 @@ export interface BestPair {
   share: number | undefined;
 }
 
-/** Pairs that serve most sitters, then most of the public, then lie nearest to the present. */
+/**
+ * Pairs that serve most sitters, then most of the public, then lie nearest to the present.
+ *
+ * @param map - what was tried
+ * @param shares - share of the public at each point, 0 to 1, null where not known; rows of `up`
+ * @param present - where the set stands
+ * @param most - pairs wanted
+ */
 export function bestPairs(
   { across, up, regions }: Pick<CastMap, 'across' | 'up' | 'regions'>,
   shares: readonly (readonly (number | null)[])[] | undefined,

@@ -1,5 +1,6 @@
 import type { PlaceSituation } from '@settlewright/anthropometry';
-import { measureSet, type SetDocument } from '@settlewright/geometry';
+import type { SetDocument } from '../room/document.ts';
+import { measureSet } from '../situation/measure-set.ts';
 
 /**
  * What sets offer at their places, one set after the other.
@@ -18,7 +19,12 @@ export function* measuredPlaces(
   return places;
 }
 
-/** Places of which something changes from set to set; all of them when nothing does. */
+/**
+ * Places of which something changes from set to set.
+ *
+ * @param along - places of each set, in the order of the values that made them
+ * @returns ids of places; all of them when nothing changes
+ */
 export function changingPlaces(along: readonly PlaceSituation[][]): string[] {
   const told = along.filter((places) => places.length > 0);
   const [first = [], middle = [], last = []] = [told[0], told[Math.floor(told.length / 2)], told.at(-1)];

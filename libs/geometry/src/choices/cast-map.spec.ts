@@ -1,9 +1,12 @@
 import { createBodyModel, checkSet, loadRuleBook, type FitSheet } from '@settlewright/anthropometry';
-import { ARRANGEMENTS, dimensionOf, measureSet, type SetDocument } from '@settlewright/geometry';
-import rules from '@settlewright/seed-data/fit-rules.json';
-import summary from '@settlewright/seed-data/populations/ansur2.json';
+import rules from '@settlewright/seed-data/fit-rules.json' with { type: 'json' };
+import summary from '@settlewright/seed-data/populations/ansur2.json' with { type: 'json' };
 import { describe, expect, it } from 'vitest';
+import type { SetDocument } from '../room/document.ts';
+import { ARRANGEMENTS } from '../room/arrangements.ts';
+import { measureSet } from '../situation/measure-set.ts';
 import { castMap, type CastMap } from './cast-map.ts';
+import { dimensionOf } from './dimensions.ts';
 
 const model = createBodyModel(summary);
 const ruleBook = loadRuleBook(rules);
