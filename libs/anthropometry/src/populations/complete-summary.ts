@@ -2,7 +2,7 @@ import { MEASURE_KEYS, type MeasureKey } from '../measures/measures.ts';
 import { normalQuantile } from '../people/normal.ts';
 import { decimals, PERCENTILE_KEYS, type ColumnStatistics } from './column-statistics.ts';
 import { fillGaps } from './fill-gaps.ts';
-import type { SpreadModel } from './spread.ts';
+import { completeSpread } from './own-spread.ts';
 import type { LogBlock, SurveySummary } from './summarise.ts';
 import type { Survey, SurveyGroup } from './survey.ts';
 import { DERIVED, fromWorked, isLogged, momentsOf, type Moments, type Worked } from './worked.ts';
@@ -23,8 +23,6 @@ export interface WholeSummary extends Omit<SurveySummary, 'stats'> {
   >;
 }
 
-/** Fewer people than this do not settle how the spread grows with weight; then the reference's growth stands. */
-const LEAST_FOR_SPREAD = 400;
 /** Ends of the range of an estimated measure, in standard deviations: one in a thousand lies beyond. */
 const END_Z = 3.09;
 
@@ -43,7 +41,13 @@ export function completeSummary(summary: SurveySummary, reference: Survey): Whol
     const { overMm, sdMm } = reference.selfReportedStature[group];
     return { over_mm: overMm, sd_mm: sdMm };
   };
-  const { ageShift, spread } = reference;
+  const { ageShift } = reference;
+  const spread = (group: SurveyGroup) => {
+    const { spread: fitted, log } = summary;
+    const own = { fitted: fitted[group], people: log[group].n, read, worked: whole[group].worked };
+    const theirs = reference.spread?.[group];
+    return theirs ? completeSpread(own, theirs, reference.worked[group]) : own.fitted;
+  };
   return {
     ...summary,
     measures: [...MEASURE_KEYS],
@@ -60,8 +64,8 @@ export function completeSummary(summary: SurveySummary, reference: Survey): Whol
     },
     spread: {
       about: summary.spread.about,
-      men: spreadOf(summary, spread, 'men'),
-      women: spreadOf(summary, spread, 'women'),
+      men: spread('men'),
+      women: spread('women'),
     },
     self_reported_stature: { men: told('men'), women: told('women') },
     mannequin: { shoe_mm: reference.mannequin.shoeMm, clothing: reference.mannequin.clothing },
@@ -155,23 +159,5 @@ function logBlockOf(n: number, { keys, mean, covariance }: Worked): LogBlock {
     mean: Array.from(mean, (x) => decimals(x, 6)),
     sd: keys.map((_, i) => decimals(Math.sqrt(covariance[i * keys.length + i] as number), 6)),
     corr: triangleOf({ keys, covariance }).flat(),
-  };
-}
-
-/** The survey's own growth of the spread where enough people were read, the reference's for the other measures. */
-function spreadOf(summary: SurveySummary, reference: Survey['spread'], group: SurveyGroup): SpreadModel {
-  const own = summary.spread[group];
-  const theirs = reference?.[group];
-  if (!theirs) return own;
-  if (summary.log[group].n < LEAST_FOR_SPREAD) return theirs;
-  return {
-    ...own,
-    sets: own.sets.map(({ given, factors }) => ({
-      given,
-      factors: {
-        ...theirs.sets.find((set) => set.given.join() === given.join())?.factors,
-        ...factors,
-      },
-    })),
   };
 }
