@@ -85,6 +85,7 @@ export {
   exactValue,
   markWords,
 } from './choices/dimension-words.ts';
+export { clashOf, MOST_FREE, SEARCH_PEOPLE, SEARCH_SEED } from './choices/free-dimensions.ts';
 export { judgeChoices, type Judging, type Served } from './choices/judge-choices.ts';
 export { suggestDimensions } from './choices/suggest-dimensions.ts';
 export type { Answer, AnswerKind, Blame, Suggestion } from './choices/suggest-dimensions.ts';

@@ -21,9 +21,6 @@ export interface SearchForm {
   crowd: CrowdChoice | null;
 }
 
-/** Most dimensions that one search moves: with more, too few choices are tried of each. */
-export const MOST_FREE = 6;
-
 const START_IDS = ['seat-height', 'seat-depth', 'table-height'];
 const REACH: Record<Dimension['unit'], number> = { mm: 2 * 25.4, deg: 4, N: 60 };
 const NEAR: Record<Dimension['unit'], number> = { mm: 0.25 * 25.4, deg: 1, N: 20 };
@@ -63,30 +60,6 @@ export function freeOf(
     const found = dimensions.find(({ id }) => id === dimensionId);
     return found ? [{ dimensionId, min, max, step: dimensionStep(found.unit, lengthStep(style)) }] : [];
   });
-}
-
-const SEAT_AND_TABLES = 'seat-and-tables';
-
-/** The numbers of pieces that a dimension sets: two dimensions that set the same one cannot both be free. */
-function setsOf({ id, pieceIds, marks }: Dimension): string[] {
-  const [kind = id] = id.split('|');
-  if (kind !== SEAT_AND_TABLES) return pieceIds.map((pieceId) => `${kind} ${pieceId}`);
-  return pieceIds.map((pieceId, n) => `${n < marks.length ? 'seat-height' : 'table-height'} ${pieceId}`);
-}
-
-/** The chosen dimension that already moves a number of this one. */
-export function clashOf(
-  dimension: Dimension,
-  form: SearchForm,
-  dimensions: readonly Dimension[],
-): Dimension | undefined {
-  const own = new Set(setsOf(dimension));
-  return dimensions.find(
-    (other) =>
-      other.id !== dimension.id &&
-      form.freedoms.some(({ dimensionId }) => dimensionId === other.id) &&
-      setsOf(other).some((one) => own.has(one)),
-  );
 }
 
 /** Everything that an answer hangs on, as one short name. */

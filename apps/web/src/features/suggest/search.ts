@@ -9,6 +9,8 @@ import {
 import {
   dimensionsOf,
   judgeChoices,
+  SEARCH_PEOPLE,
+  SEARCH_SEED,
   suggestDimensions,
   type FreeDimension,
   type SetDocument,
@@ -46,10 +48,6 @@ export interface SearchTold {
   ended: boolean;
 }
 
-/** People drawn for a share: good to about two in a hundred. */
-export const SEARCH_PEOPLE = 4000;
-/** The same people each time. */
-const SEED = 1;
 /** How long it works before it speaks again, milliseconds. */
 const SPEAK_EVERY_MS = 250;
 
@@ -70,7 +68,7 @@ async function fetchGround(): Promise<Ground> {
 async function drawn(request: CrowdRequest): Promise<{ draws: Draws; told: CrowdTold }> {
   const people = await peopleOf(request);
   const { name, source, cautions } = people;
-  return { draws: people.draw(SEARCH_PEOPLE, SEED), told: { name, source, cautions: [...cautions] } };
+  return { draws: people.draw(SEARCH_PEOPLE, SEARCH_SEED), told: { name, source, cautions: [...cautions] } };
 }
 
 /**

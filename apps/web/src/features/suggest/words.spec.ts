@@ -1,7 +1,7 @@
 import { dimensionsOf } from '@settlewright/geometry';
 import { describe, expect, it } from 'vitest';
 import { effectsOf } from './effects.ts';
-import { clashOf, freeOf, questionOf, startForm, startFreedom } from './search-form.ts';
+import { freeOf, questionOf, startForm, startFreedom } from './search-form.ts';
 import { bay, check, INCHES, ruleBook } from './test/show-suggest.tsx';
 import {
   blameWords,
@@ -121,15 +121,6 @@ describe('what may move', () => {
         expect(max).toBeGreaterThanOrEqual(dimension.value);
       }
     }
-  });
-
-  it('never moves one number by two choices', () => {
-    const form = startForm(bay);
-    const clashes = dimensions.filter((one) => clashOf(one, form, dimensions)).map(({ id }) => id);
-    expect(clashes).toContain('seat-and-tables');
-    expect(clashes).toContain('seat-height|b1');
-    expect(clashes).not.toContain('back-lean');
-    expect(clashes).not.toContain('seat-height');
   });
 
   it('names another question by another name', () => {

@@ -1,9 +1,9 @@
-import type { Dimension } from '@settlewright/geometry';
+import { clashOf, MOST_FREE, type Dimension } from '@settlewright/geometry';
 import { Disclosure } from '@/components/disclosure.tsx';
 import { Measure } from '@/components/measure.tsx';
 import { RuleHeading } from '@/components/rule-heading.tsx';
 import { dimensionValue, dimensionWords } from '@/lib/dimension-words.ts';
-import { clashOf, MOST_FREE, startFreedom, type SearchForm } from '../search-form.ts';
+import { startFreedom, type SearchForm } from '../search-form.ts';
 import { useSuggestView } from '../suggest-view.ts';
 import { FreedomFields } from './freedom-fields.tsx';
 
@@ -30,6 +30,8 @@ const GROUPS = [
   { words: 'Tables', kinds: ['table-height', 'table-apron', 'table-top', 'table-overlap'] },
   { words: 'Sills and overhead', kinds: ['sill-height', 'sill-depth', 'headroom'] },
 ] as const;
+
+const chosenIds = ({ freedoms }: SearchForm): string[] => freedoms.map(({ dimensionId }) => dimensionId);
 
 const kindOf = ({ id }: Dimension): string => id.split('|')[0] ?? id;
 
@@ -76,7 +78,7 @@ export function FreeDimensions({ dimensions, form, onChange }: FreeDimensionsPro
 function FreeRow({ dimension, dimensions, form, onChange }: FreeDimensionsProps & { dimension: Dimension }) {
   const { style } = useSuggestView();
   const freedom = form.freedoms.find(({ dimensionId }) => dimensionId === dimension.id);
-  const clash = freedom ? undefined : clashOf(dimension, form, dimensions);
+  const clash = freedom ? undefined : clashOf(dimension, chosenIds(form), dimensions);
   const isFull = !freedom && form.freedoms.length >= MOST_FREE;
   const others = form.freedoms.filter(({ dimensionId }) => dimensionId !== dimension.id);
   return (
