@@ -90,6 +90,23 @@ describe('a preview', () => {
     expect(problems[0].message).toMatch(/"Gender"; accepted: Name, Sex,/);
   });
 
+  it('finds the unit of a column that a person pointed out', async () => {
+    const csv = surveyCsv().replace('Height (cm)', 'How tall');
+    const { sex, measures, ...rest } = SURVEY_MAPPING;
+    const mapping = {
+      ...rest,
+      sex,
+      measures: measures.map(({ key, column, unit }) =>
+        key === 'stature' ? { key, column: 'How tall' } : { key, column, unit },
+      ),
+    };
+    const body = await preview({ csv, mapping });
+    expect(body.mapping.measures[0]).toEqual({ key: 'stature', column: 'How tall', unit: 'cm' });
+    expect(body).toMatchObject({ women: 40, faults: [], problems: [] });
+    const { body: refused } = await as(test, owner).post(path).send(surveyBody({ csv, mapping })).expect(400);
+    expect(refused.fields[0].path).toBe('mapping.measures.0.unit');
+  });
+
   it('says how many people of each sex it takes', async () => {
     const { women, problems } = await preview({ csv: surveyCsv({ each: 29 }) });
     expect(women).toBe(29);
@@ -252,8 +269,13 @@ describe('a population', () => {
       )
       .map(({ low, high }: { low: number; high: number }) => high - low);
     expect(Math.max(...wide)).toBeGreaterThan(0.15);
+    const uses = (await as(test, designer).get(`${path}/${id}/studies`).expect(200)).body;
+    expect(uses.items).toEqual([
+      expect.objectContaining({ setId: place.setPath.split('/').at(-1), studies: 1, unfinished: 0 }),
+    ]);
     await as(test, owner).delete(`${path}/${id}`).expect(204);
     await as(test, owner).get(`${path}/${id}`).expect(404);
+    await as(test, owner).get(`${path}/${id}/studies`).expect(404);
     const after = (
       await as(test, owner)
         .get(`${place.setPath}/studies/${study.id as string}`)
@@ -266,6 +288,7 @@ describe('a population', () => {
     const { id } = await add({ name: 'Ours' });
     const other = await createWorkshop(test);
     await as(test, other.owner).get(`/workshops/${other.id}/populations/${id}`).expect(404);
+    await as(test, other.owner).get(`/workshops/${other.id}/populations/${id}/studies`).expect(404);
     await as(test, other.owner).delete(`/workshops/${other.id}/populations/${id}`).expect(404);
     const place = await createSet(test, await createProduction(test, {}, other));
     const asked = { populationId: id, people: 200, draftNumber: 1 };

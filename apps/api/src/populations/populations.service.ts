@@ -17,7 +17,7 @@ import { OwnPopulation } from './entities/own-population.entity';
 import { PopulationRows } from './entities/population-rows.entity';
 import { isWhole, mappingFaults } from './survey/check-mapping';
 import { type CheckedSurvey, checkSurvey, keptRows, summaryOf } from './survey/read-people';
-import { suggestMapping } from './survey/suggest-mapping';
+import { suggestMapping, withUnits } from './survey/suggest-mapping';
 import { columnOf, readSurveyFile, shortened } from './survey/survey-file';
 
 const FAULTS_SHOWN = 200;
@@ -47,7 +47,7 @@ export class PopulationsService {
 
   preview({ csv, mapping: sent }: PreviewPopulationDto): PopulationPreviewDto {
     const file = readSurveyFile(csv);
-    const mapping = sent ?? suggestMapping(file);
+    const mapping = sent ? withUnits(file, sent) : suggestMapping(file);
     const faults = mappingFaults(file, mapping);
     const checked = isWhole(mapping, faults) ? checkSurvey(file, mapping) : undefined;
     const read = checked?.read ?? [];

@@ -99,6 +99,7 @@ export const EXPECTED_ACCESS: Record<string, AccessRule> = {
   [`POST ${W}/populations/preview`]: MAKERS,
   [`GET ${W}/populations/{populationId}`]: EVERY_MEMBER,
   [`DELETE ${W}/populations/{populationId}`]: MAKERS,
+  [`GET ${W}/populations/{populationId}/studies`]: MAKERS,
   [`GET ${W}/populations/{populationId}/rows.csv`]: OWNER,
   [`DELETE ${W}/populations/{populationId}/rows`]: MAKERS,
 

@@ -917,6 +917,22 @@ export interface paths {
         patch?: never;
         trace?: never;
     };
+    "/api/workshops/{workshopId}/populations/{populationId}/studies": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        get: operations["PopulationUses_list"];
+        put?: never;
+        post?: never;
+        delete?: never;
+        options?: never;
+        head?: never;
+        patch?: never;
+        trace?: never;
+    };
     "/api/workshops/{workshopId}/upholsterers": {
         parameters: {
             query?: never;
@@ -2209,6 +2225,36 @@ export interface components {
             /** @description what stands for a man; else m, male, man, men */
             men?: string[];
         };
+        OpenMeasureColumnDto: {
+            key: components["schemas"]["MeasureKey"];
+            /** @description heading of the column */
+            column: string;
+            /**
+             * @description guessed from the values when absent
+             * @enum {string}
+             */
+            unit?: "mm" | "cm" | "m" | "in" | "kg" | "0.1kg" | "lb";
+        };
+        OpenMappingDto: {
+            /** @description heading of the column with years of age */
+            age?: string;
+            /** @description a comma stands before the decimals */
+            decimalComma: boolean;
+            sex?: components["schemas"]["SexColumnDto"];
+            measures: components["schemas"]["OpenMeasureColumnDto"][];
+        };
+        PreviewPopulationDto: {
+            /** @description the text of the file, up to 2 MB and 10000 rows */
+            csv: string;
+            /** @description the suggested one when absent */
+            mapping?: components["schemas"]["OpenMappingDto"];
+        };
+        SurveyColumnDto: {
+            /** @description its heading */
+            name: string;
+            /** @description the first values */
+            examples: string[];
+        };
         MeasureColumnDto: {
             key: components["schemas"]["MeasureKey"];
             /** @description heading of the column */
@@ -2218,27 +2264,6 @@ export interface components {
              * @enum {string}
              */
             unit: "mm" | "cm" | "m" | "in" | "kg" | "0.1kg" | "lb";
-        };
-        MappingDto: {
-            sex: components["schemas"]["SexColumnDto"];
-            /** @description heading of the column with years of age */
-            age?: string;
-            /** @description stature and weight_kg among them */
-            measures: components["schemas"]["MeasureColumnDto"][];
-            /** @description a comma stands before the decimals */
-            decimalComma: boolean;
-        };
-        PreviewPopulationDto: {
-            /** @description the text of the file, up to 2 MB and 10000 rows */
-            csv: string;
-            /** @description the suggested one when absent */
-            mapping?: components["schemas"]["MappingDto"];
-        };
-        SurveyColumnDto: {
-            /** @description its heading */
-            name: string;
-            /** @description the first values */
-            examples: string[];
         };
         SuggestedMappingDto: {
             sex?: components["schemas"]["SexColumnDto"];
@@ -2274,6 +2299,15 @@ export interface components {
             read: components["schemas"]["MeasureKey"][];
             /** @description would be estimated from the others, as they hang together in US soldiers of 2012 */
             estimated: components["schemas"]["MeasureKey"][];
+        };
+        MappingDto: {
+            /** @description heading of the column with years of age */
+            age?: string;
+            /** @description a comma stands before the decimals */
+            decimalComma: boolean;
+            sex: components["schemas"]["SexColumnDto"];
+            /** @description stature and weight_kg among them */
+            measures: components["schemas"]["MeasureColumnDto"][];
         };
         CreatePopulationDto: {
             name: string;
@@ -2416,6 +2450,22 @@ export interface components {
             result?: {
                 [key: string]: unknown;
             };
+        };
+        PopulationUseDto: {
+            /** Format: uuid */
+            productionId: string;
+            productionName: string;
+            /** Format: uuid */
+            setId: string;
+            setName: string;
+            /** @description studies that drew from it */
+            studies: number;
+            /** @description those of them that are still being counted */
+            unfinished: number;
+        };
+        PopulationUsesDto: {
+            /** @description by production and set */
+            items: components["schemas"]["PopulationUseDto"][];
         };
         UpholstererDto: {
             /** Format: uuid */
@@ -5587,6 +5637,37 @@ export interface operations {
                     [name: string]: unknown;
                 };
                 content?: never;
+            };
+            /** @description what went wrong (RFC 9457) */
+            default: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemBody"];
+                };
+            };
+        };
+    };
+    PopulationUses_list: {
+        parameters: {
+            query?: never;
+            header?: never;
+            path: {
+                populationId: string;
+                workshopId: unknown;
+            };
+            cookie?: never;
+        };
+        requestBody?: never;
+        responses: {
+            200: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["PopulationUsesDto"];
+                };
             };
             /** @description what went wrong (RFC 9457) */
             default: {

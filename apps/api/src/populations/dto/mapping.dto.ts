@@ -12,7 +12,7 @@ import {
   MaxLength,
   ValidateNested,
 } from 'class-validator';
-import { ALL_UNITS, type Mapping, type SurveyUnit } from '../survey/mapping';
+import { ALL_UNITS, type Mapping, type OpenMapping, type SurveyUnit } from '../survey/mapping';
 
 const HEADING_MAX = 400;
 const WORDS_MAX = 20;
@@ -43,7 +43,7 @@ export class SexColumnDto {
   men?: string[];
 }
 
-export class MeasureColumnDto {
+class MeasureColumnBase {
   @ApiProperty({ enum: MEASURE_KEYS, enumName: 'MeasureKey' })
   @IsIn(MEASURE_KEYS)
   key: MeasureKey;
@@ -52,7 +52,9 @@ export class MeasureColumnDto {
   @IsString()
   @MaxLength(HEADING_MAX)
   column: string;
+}
 
+export class MeasureColumnDto extends MeasureColumnBase {
   @ApiProperty({
     enum: ALL_UNITS,
     description: '`kg`, `0.1kg` and `lb` for the weight, the others for lengths',
@@ -61,21 +63,34 @@ export class MeasureColumnDto {
   unit: SurveyUnit;
 }
 
+export class OpenMeasureColumnDto extends MeasureColumnBase {
+  @ApiPropertyOptional({ enum: ALL_UNITS, description: 'guessed from the values when absent' })
+  @IsOptional()
+  @IsIn(ALL_UNITS)
+  unit?: SurveyUnit;
+}
+
+class MappingBase {
+  @ApiPropertyOptional({ maxLength: HEADING_MAX, description: 'heading of the column with years of age' })
+  @IsOptional()
+  @IsString()
+  @MaxLength(HEADING_MAX)
+  age?: string;
+
+  @ApiProperty({ description: 'a comma stands before the decimals' })
+  @IsBoolean()
+  decimalComma: boolean;
+}
+
 /** Which column holds what. */
-export class MappingDto implements Mapping {
-  // Its absence is among the problems of a preview.
+export class MappingDto extends MappingBase implements Mapping {
+  // Its absence is told with the other problems of the mapping.
   @ApiProperty({ type: SexColumnDto })
   @IsOptional()
   @IsObject()
   @ValidateNested()
   @Type(() => SexColumnDto)
   sex: SexColumnDto;
-
-  @ApiPropertyOptional({ maxLength: HEADING_MAX, description: 'heading of the column with years of age' })
-  @IsOptional()
-  @IsString()
-  @MaxLength(HEADING_MAX)
-  age?: string;
 
   @ApiProperty({ type: [MeasureColumnDto], description: 'stature and weight_kg among them' })
   @IsArray()
@@ -84,10 +99,24 @@ export class MappingDto implements Mapping {
   @ValidateNested({ each: true })
   @Type(() => MeasureColumnDto)
   measures: MeasureColumnDto[];
+}
 
-  @ApiProperty({ description: 'a comma stands before the decimals' })
-  @IsBoolean()
-  decimalComma: boolean;
+/** The same while it is being made. */
+export class OpenMappingDto extends MappingBase implements OpenMapping {
+  @ApiPropertyOptional({ type: SexColumnDto })
+  @IsOptional()
+  @IsObject()
+  @ValidateNested()
+  @Type(() => SexColumnDto)
+  sex?: SexColumnDto;
+
+  @ApiProperty({ type: [OpenMeasureColumnDto] })
+  @IsArray()
+  @ArrayMaxSize(MEASURE_KEYS.length)
+  @IsObject({ each: true })
+  @ValidateNested({ each: true })
+  @Type(() => OpenMeasureColumnDto)
+  measures: OpenMeasureColumnDto[];
 }
 
 /** What the columns seem to hold; what could not be guessed is absent. */

@@ -5,7 +5,7 @@ import { IsBoolean, IsObject, IsOptional, IsString, ValidateNested } from 'class
 import { ProblemField } from '../../common/problem';
 import { TextField } from '../../common/text-field';
 import { SURVEY_MAX_ROWS } from '../survey/survey-file';
-import { MappingDto, SuggestedMappingDto } from './mapping.dto';
+import { MappingDto, OpenMappingDto, SuggestedMappingDto } from './mapping.dto';
 
 const CSV = `the text of the file, up to 2 MB and ${SURVEY_MAX_ROWS} rows`;
 
@@ -14,12 +14,12 @@ export class PreviewPopulationDto {
   @IsString()
   csv: string;
 
-  @ApiPropertyOptional({ type: MappingDto, description: 'the suggested one when absent' })
+  @ApiPropertyOptional({ type: OpenMappingDto, description: 'the suggested one when absent' })
   @IsOptional()
   @IsObject()
   @ValidateNested()
-  @Type(() => MappingDto)
-  mapping?: MappingDto;
+  @Type(() => OpenMappingDto)
+  mapping?: OpenMappingDto;
 }
 
 export class CreatePopulationDto {

@@ -43,7 +43,7 @@ export function mappingFaults(file: SurveyFile, mapping: SuggestedMapping): Prob
   });
   for (const key of NEEDED) {
     if (!mapping.measures.some((measure) => measure.key === key)) {
-      const words = `no column holds ${MEASURE_INFO[key].plain} (${key}); it is needed, the rest can be estimated`;
+      const words = `no column holds the ${MEASURE_INFO[key].plain}; it is needed, the rest can be estimated`;
       fault('measures', 'missing', words);
     }
   }

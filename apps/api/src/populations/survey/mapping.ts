@@ -18,3 +18,8 @@ export interface Mapping {
 
 /** The same, as far as it could be guessed. */
 export type SuggestedMapping = Partial<Pick<Mapping, 'sex' | 'age'>> & Omit<Mapping, 'sex' | 'age'>;
+
+/** The same while a person makes it: the unit of a column may be left to its values. */
+export type OpenMapping = Omit<SuggestedMapping, 'measures'> & {
+  measures: (Omit<Mapping['measures'][number], 'unit'> & { unit?: SurveyUnit })[];
+};

@@ -1,6 +1,6 @@
 import { MEASURE_INFO, MEASURE_KEYS, type MeasureKey, SURVEY_UNITS } from '@settlewright/anthropometry';
 import { referenceSurvey } from '../built-in';
-import { ALL_UNITS, type SuggestedMapping, type SurveyUnit } from './mapping';
+import { ALL_UNITS, type OpenMapping, type SuggestedMapping, type SurveyUnit } from './mapping';
 import { columnOf, type SurveyFile } from './survey-file';
 
 const SEX_WORDS = new Set(['sex', 'gender', 'group', 'body', 'women_men']);
@@ -59,6 +59,17 @@ export function suggestMapping(file: SurveyFile): SuggestedMapping {
     measures.push({ key: found.key, column, unit });
   }
   return { ...(sex ? { sex } : {}), ...(age ? { age } : {}), measures, decimalComma };
+}
+
+/** Every column with its unit: the one given, or else the one that brings the middle value nearest to a body. */
+export function withUnits(file: SurveyFile, mapping: OpenMapping): SuggestedMapping {
+  const { decimalComma } = mapping;
+  const measures = mapping.measures.map(({ key, column, unit }) => ({
+    key,
+    column,
+    unit: unit ?? nearestUnit(key, columnOf(file, column) ?? [], decimalComma),
+  }));
+  return { ...mapping, measures };
 }
 
 function wordsOf(heading: string): string {
