@@ -18,6 +18,7 @@ export { standInPlaces, unlikePlaces } from './checks/unlike-places.ts';
 export type { CheckSettings } from './checks/piece-check.ts';
 export { PERSON_CHECKS } from './checks/person-checks.ts';
 export { codeLoad } from './checks/bench-checks.ts';
+export { kneeDepthNeededMm } from './checks/clause-checks.ts';
 export { fullLegStretchMm } from './checks/table-checks.ts';
 export { readSurvey, type Survey, type SurveyGroup } from './populations/survey.ts';
 export * from './populations/survey-rows.ts';

@@ -47,7 +47,7 @@ export class FitCheckService {
   /** `confidence` is what the workshop asks of a verdict; null: as much as the rule book does. */
   sheetFor(document: SetDocument, cast: readonly CastPerson[], confidence: number | null): FitSheet {
     return checkSet({
-      situation: measureSet(document),
+      situation: measureSet(document, this.ruleBook),
       sitters: this.sitters(document, cast),
       ruleBook: this.ruleBook,
       model: this.model,
@@ -67,7 +67,7 @@ export class FitCheckService {
   ): AsyncGenerator<SitterNext> {
     const { ruleBook, model } = this;
     const settings = { ...document.asked, ...(confidence === null ? {} : { confidence }) };
-    const input = { situation: measureSet(document), ruleBook, model, settings };
+    const input = { situation: measureSet(document, ruleBook), ruleBook, model, settings };
     const asked = digest([document, confidence]);
     for (const sitter of this.sitters(document, cast)) {
       if (sitter.kind !== 'cast') continue;

@@ -36,7 +36,7 @@ const SITTERS: Sitter[] = (
 
 const check = (document: SetDocument): FitSheet =>
   checkSet({
-    situation: measureSet(document),
+    situation: measureSet(document, ruleBook),
     sitters: SITTERS,
     ruleBook,
     model,

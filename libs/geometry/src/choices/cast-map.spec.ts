@@ -17,7 +17,7 @@ const values = [380, 420, 460];
 /** One woman at a place; the second value takes her place away. */
 const check = (document: SetDocument): FitSheet =>
   checkSet({
-    situation: measureSet(document),
+    situation: measureSet(document, ruleBook),
     sitters: [
       {
         id: 'one',

@@ -30,7 +30,7 @@ const TALL = seated('tall', 'b2:1', 'men', 95);
 
 const sheetOf = (document: SetDocument, sitters: Sitter[]): FitSheet =>
   checkSet({
-    situation: measureSet(document),
+    situation: measureSet(document, ruleBook),
     sitters,
     ruleBook,
     model,

@@ -41,7 +41,7 @@ describe('choices judged', () => {
 
   it('says of the sitters what the whole sheet says', () => {
     const whole = checkSet({
-      situation: measureSet(bay),
+      situation: measureSet(bay, ruleBook),
       sitters,
       ruleBook,
       model,

@@ -57,7 +57,7 @@ export function judgeChoices(
 ): Judging {
   const measured = new WeakMap<SetDocument, SetSituation>();
   const situationOf = (document: SetDocument): SetSituation => {
-    const situation = measured.get(document) ?? measureSet(document);
+    const situation = measured.get(document) ?? measureSet(document, ruleBook);
     measured.set(document, situation);
     return situation;
   };

@@ -47,7 +47,7 @@ const sitters: Sitter[] = [MEASURED, TOLD].map((person, i) => ({
 
 const check = (document: SetDocument): FitSheet =>
   checkSet({
-    situation: measureSet(document),
+    situation: measureSet(document, ruleBook),
     sitters,
     ruleBook,
     model,

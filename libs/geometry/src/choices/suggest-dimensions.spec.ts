@@ -31,7 +31,7 @@ const checkOf =
   (sitters: Sitter[]) =>
   (document: SetDocument): FitSheet =>
     checkSet({
-      situation: measureSet(document),
+      situation: measureSet(document, ruleBook),
       sitters,
       ruleBook,
       model,

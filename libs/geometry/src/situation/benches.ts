@@ -3,27 +3,27 @@ import { normalTurnDeg, toPiece } from '../parts/placement.ts';
 import { benchLayout } from '../pieces/bench-layout.ts';
 import { insideCorners } from '../pieces/corners.ts';
 import type { PieceOf } from '../room/document.ts';
+import { radians } from '../units/angle.ts';
 import { clippedLine, extent, inFrame, type PlanOutline } from './plan.ts';
 import { endSpace } from './clear-floor.ts';
+import type { Limits } from './limits.ts';
 import { peopleToSlidePast } from './ways-out.ts';
 import { benchesOf, placesOf, planOfPiece, rectangleOf, type Survey } from './survey.ts';
 
 type Bench = PieceOf<'bench'>;
 
-const TO_WALL_MM = 30;
-const PARALLEL_WITHIN_DEG = 3;
-
 /**
  * Every bench as a whole.
  *
  * @param found - the survey
+ * @param limits - of the rules
  * @returns one entry a bench
  */
-export function benchSituations(found: Survey): BenchSituation[] {
+export function benchSituations(found: Survey, limits: Limits): BenchSituation[] {
   return benchesOf(found).map((bench) => {
     const layout = benchLayout(bench);
     const seatTop = layout.seatTopFrontMm;
-    const wall = wallBehind(found, bench);
+    const wall = wallBehind(found, bench, limits);
     const inner = layout.innerRightMm - layout.innerLeftMm;
     const own = {
       bottomAboveSeatMm: 0,
@@ -49,9 +49,9 @@ export function benchSituations(found: Survey): BenchSituation[] {
       accessible: bench.accessible,
       back: layout.hasBack ? own : wallAlone,
       lumbar: layout.hasBack ? (bench.lumbar ?? { apexMm: 0, recessMm: 0 }) : undefined,
-      slidePast: peopleToSlidePast(found, bench),
+      slidePast: peopleToSlidePast(found, bench, limits),
       // Measured where it is asked: a wheelchair comes alongside a bench that is kept accessible.
-      endSpace: bench.accessible ? endSpace(found, bench) : undefined,
+      endSpace: bench.accessible ? endSpace(found, bench, limits) : undefined,
     };
   });
 }
@@ -86,15 +86,16 @@ export function cornerSituations(found: Survey): CornerSituation[] {
 function wallBehind(
   found: Survey,
   bench: Bench,
+  { wall: { withinMm, parallelRad } }: Limits,
 ): { topMm: number; gapMm: number; coveredMm: number } | undefined {
   const half = bench.lengthMm / 2;
   const rear: PlanOutline = rectangleOf(bench, [-half, half], [0, 0]);
   for (const { piece } of found.pieces) {
     if (piece.kind !== 'bulkhead') continue;
-    if (Math.abs(normalTurnDeg(piece.at.turnDeg - bench.at.turnDeg)) > PARALLEL_WITHIN_DEG) continue;
+    if (Math.abs(radians(normalTurnDeg(piece.at.turnDeg - bench.at.turnDeg))) > parallelRad) continue;
     const wall = inFrame(rear, planOfPiece(piece));
     const [near, far] = extent(wall, 1);
-    if (near < -TO_WALL_MM || far > TO_WALL_MM) continue;
+    if (near < -withinMm || far > withinMm) continue;
     const beside = clippedLine(wall, { left: [-piece.lengthMm / 2, piece.lengthMm / 2] });
     if (beside.length === 0) continue;
     const [left, right] = extent(beside, 0);

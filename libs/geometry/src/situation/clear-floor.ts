@@ -1,18 +1,12 @@
 import type { PieceOf } from '../room/document.ts';
 import { benchLayout } from '../pieces/bench-layout.ts';
-import { MM_PER_INCH } from '../units/length-style.ts';
+import type { Limits } from './limits.ts';
 import { clipped, extent, type PlanOutline, type PlanSolid } from './plan.ts';
 import { nearestOnSide } from './plan-distance.ts';
 import { planOfPiece, solidsNear, type Survey } from './survey.ts';
 
-/** What hangs higher than this is in nobody's way on the floor, millimetres: 80 in, ADA 307.4 (from memory). */
-export const OVER_HEADS_MM = 2032;
 /** Clear floor is measured up to here; more asks nobody. */
 const FAR_MM = 2000;
-/** Clear floor of ADA 305.3, at the place where it is looked for: 30 by 48 in. */
-const FLOOR_MM = [30 * MM_PER_INCH, 48 * MM_PER_INCH] as const;
-/** ADA 304.3.2: a T lies within a square of 60 in. */
-const TEE_SQUARE_MM = 60 * MM_PER_INCH;
 const NUDGE_MM = 0.01;
 
 /** A spot on the floor. */
@@ -21,19 +15,23 @@ export interface Spot {
   zMm: number;
 }
 
-/** Whether a solid stands where people go. */
-export const isInTheWay = ({ bottomMm, topMm }: PlanSolid): boolean => bottomMm < OVER_HEADS_MM && topMm > 0;
+/** Tells whether a solid stands where people go. */
+export const inTheWay =
+  ({ overHeadsMm }: Limits) =>
+  ({ bottomMm, topMm }: PlanSolid): boolean =>
+    bottomMm < overHeadsMm && topMm > 0;
 
 /**
  * The largest circle around a spot that nothing stands in. Knee and toe space under tables is not counted.
  *
  * @param found - the survey
  * @param spot - middle of the circle
+ * @param limits - of the rules
  * @returns its diameter, millimetres; 0 when something stands on the spot
  */
-export function clearCircle(found: Survey, spot: Spot): number {
+export function clearCircle(found: Survey, spot: Spot, limits: Limits): number {
   const plan = { ...spot, facingRad: 0 };
-  const distances = solidsNear(found, plan, FAR_MM, () => true, isInTheWay).map(({ outline }) =>
+  const distances = solidsNear(found, plan, FAR_MM, () => true, inTheWay(limits)).map(({ outline }) =>
     distanceToOrigin(outline),
   );
   return 2 * Math.min(FAR_MM, ...distances);
@@ -58,43 +56,45 @@ function distanceToOrigin(outline: PlanOutline): number {
  *
  * @param found - the survey
  * @param spot - middle of the square that the T lies in
+ * @param limits - of the rules
  * @returns width of its arms, millimetres; 0 where the bar of the T is not clear
- * @source square of ADA 304.3.2
+ * @source square of rule ACC-08
  */
-export function clearTeeArm(found: Survey, spot: Spot): number {
-  const half = TEE_SQUARE_MM / 2;
+export function clearTeeArm(found: Survey, spot: Spot, limits: Limits): number {
+  const squareMm = limits.teeSquareMm;
+  const half = squareMm / 2;
   return Math.max(
     ...[0, 1, 2, 3].map((quarter) => {
       const plan = { ...spot, facingRad: (quarter * Math.PI) / 2 };
-      const near = solidsNear(found, plan, TEE_SQUARE_MM, () => true, isInTheWay);
+      const near = solidsNear(found, plan, squareMm, () => true, inTheWay(limits));
       // The bar grows from one side of the square, the base from its middle line: the lesser of the two counts.
-      const bar = depthOf(near, [-half, half], -half);
+      const bar = depthOf(near, half);
       const base = stemWidth(near, -half + bar, half);
       return Math.min(bar, base);
     }),
   );
 }
 
-/** How far a strip is clear from a line on. */
-function depthOf(solids: readonly PlanSolid[], left: readonly [number, number], from: number): number {
-  const inside = solids.map(({ outline }) => clipped(outline, { left, ahead: [from, from + TEE_SQUARE_MM] }));
+/** How far a square is clear from one side of it on, all across. */
+function depthOf(solids: readonly PlanSolid[], half: number): number {
+  const inside = solids.map(({ outline }) => clipped(outline, { left: [-half, half], ahead: [-half, half] }));
   return Math.min(
-    TEE_SQUARE_MM,
-    ...inside.filter((outline) => outline.length > 0).map((outline) => extent(outline, 1)[0] - from),
+    2 * half,
+    ...inside.filter((outline) => outline.length > 0).map((outline) => extent(outline, 1)[0] + half),
   );
 }
 
-/** Clear width to both sides of the middle line between two depths; without bound where there is no such stretch. */
-function stemWidth(solids: readonly PlanSolid[], from: number, to: number): number {
-  if (to - from < NUDGE_MM) return TEE_SQUARE_MM;
+/** Clear width to both sides of the middle line from a depth to the far side; the whole square where none is left. */
+function stemWidth(solids: readonly PlanSolid[], from: number, half: number): number {
+  if (half - from < NUDGE_MM) return 2 * half;
   const halves = solids
-    .map(({ outline }) => clipped(outline, { ahead: [from, to] }))
+    .map(({ outline }) => clipped(outline, { ahead: [from, half] }))
     .filter((outline) => outline.length > 0)
     .map((outline) => {
       const [low, high] = extent(outline, 0);
       return low > 0 ? low : high < 0 ? -high : 0;
     });
-  return Math.min(TEE_SQUARE_MM, 2 * Math.min(Infinity, ...halves));
+  return 2 * Math.min(half, ...halves);
 }
 
 /**
@@ -103,11 +103,16 @@ function stemWidth(solids: readonly PlanSolid[], from: number, to: number): numb
  *
  * @param found - the survey
  * @param bench - the bench
+ * @param limits - of the rules
  * @returns across, away from the end, and along the end; millimetres, held to 2 m
- * @source ADA 903.2: at the end of the seat, parallel to its short axis
+ * @source rule ACC-04: at the end of the seat, parallel to its short axis
  */
-export function endSpace(found: Survey, bench: PieceOf<'bench'>): { widthMm: number; lengthMm: number } {
-  const [strip, run] = FLOOR_MM;
+export function endSpace(
+  found: Survey,
+  bench: PieceOf<'bench'>,
+  limits: Limits,
+): { widthMm: number; lengthMm: number } {
+  const [strip, run] = limits.floorMm;
   const plan = planOfPiece(bench);
   const front = benchLayout(bench).frontZMm;
   const near = solidsNear(
@@ -115,7 +120,7 @@ export function endSpace(found: Survey, bench: PieceOf<'bench'>): { widthMm: num
     plan,
     bench.lengthMm / 2 + FAR_MM + front,
     (piece) => piece.id !== bench.id,
-    isInTheWay,
+    inTheWay(limits),
   );
   const ends = ([1, -1] as const).map((sign) => {
     const beside = (across: number): [number, number] => {

@@ -1,3 +1,5 @@
+import { loadRuleBook } from '@settlewright/anthropometry';
+import rules from '@settlewright/seed-data/fit-rules.json' with { type: 'json' };
 import type { SetSituation } from '@settlewright/anthropometry';
 import fc from 'fast-check';
 import { describe, expect, it } from 'vitest';
@@ -7,7 +9,10 @@ import { ARRANGEMENTS } from '../room/arrangements.ts';
 import { addPiece, newPiece } from '../room/edit-pieces.ts';
 import { emptySetDocument } from '../room/read-document.ts';
 import { benchLayout } from '../pieces/bench-layout.ts';
-import { measureSet } from './measure-set.ts';
+import { measureSet as measured } from './measure-set.ts';
+
+const ruleBook = loadRuleBook(rules);
+const measureSet = (document: SetDocument) => measured(document, ruleBook);
 
 const INCH = 25.4;
 

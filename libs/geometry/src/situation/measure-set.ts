@@ -1,4 +1,4 @@
-import type { PlaceSituation, SetSituation } from '@settlewright/anthropometry';
+import type { PlaceSituation, RuleBook, SetSituation } from '@settlewright/anthropometry';
 import { benchLayout } from '../pieces/bench-layout.ts';
 import { pressedSeatHeightMm } from '../pieces/seat-sink.ts';
 import type { SetDocument } from '../room/document.ts';
@@ -8,46 +8,68 @@ import { clearCircle, clearTeeArm } from './clear-floor.ts';
 import { facingSituations } from './facing.ts';
 import { overheadAheadOf, overheadOf, sillsBeside, wallsBeside } from './beside.ts';
 import { lapTable } from './lap-table.ts';
+import { limitsOf } from './limits.ts';
 import { routeStretches } from './route.ts';
 import { rowSituations } from './rows.ts';
 import { survey, type Survey, type SurveyedPlace } from './survey.ts';
-import { tableSituations } from './tables.ts';
+import { tableDiners, tableSituations, type TableDiners } from './tables.ts';
 import { waySituations } from './ways.ts';
 
 /**
  * How far from the seat's centreline a sill's near edge may lie and still be beside the place:
  * half of the widest forearms of SILL-04 (667 mm) and 75 mm.
  */
-export const SILL_REACH_MM = 667 / 2 + 75;
+const SILL_REACH_MM = 667 / 2 + 75;
 
+/** What a set offers to whoever sits: what can be measured without the rules of pieces and ways. */
+export interface SeatSituation extends Pick<SetSituation, 'places' | 'facing' | 'corners'> {
+  tables: TableDiners[];
+}
+
+/**
+ * Measures what a set offers to whoever sits. Checks of single sitters read nothing else of the set.
+ *
+ * @param document - the set
+ * @returns lengths in millimetres, angles in radians
+ */
+export function measureSet(document: SetDocument): SeatSituation;
 /**
  * Measures what a set offers at every place, bench, table and way. Checks read nothing else of the set.
  *
  * @param document - the set
- * @param settings - `sillReachMm` widens or narrows which sills count as beside a place
+ * @param ruleBook - some rules of pieces and ways say how they are measured
  * @returns lengths in millimetres, angles in radians
  */
-export function measureSet(document: SetDocument, settings: { sillReachMm?: number } = {}): SetSituation {
+export function measureSet(document: SetDocument, ruleBook: Pick<RuleBook, 'rule'>): SetSituation;
+export function measureSet(
+  document: SetDocument,
+  ruleBook?: Pick<RuleBook, 'rule'>,
+): SeatSituation | SetSituation {
   const found = survey(document);
-  const reach = settings.sillReachMm ?? SILL_REACH_MM;
-  const places = found.places.map((place) => placeSituation(found, place, reach));
+  const places = found.places.map((place) => placeSituation(found, place));
+  const seats = { places, facing: facingSituations(found), corners: cornerSituations(found) };
+  if (!ruleBook) return { ...seats, tables: tableDiners(found, places) };
+  const limits = limitsOf(ruleBook);
   const { route, turningAt } = document.asked;
   return {
-    places,
-    benches: benchSituations(found),
-    tables: tableSituations(found, places),
-    facing: facingSituations(found),
-    corners: cornerSituations(found),
-    ways: waySituations(found, places),
-    rows: rowSituations(found),
-    ...(route ? { route: routeStretches(found, route) } : {}),
+    ...seats,
+    benches: benchSituations(found, limits),
+    tables: tableSituations(found, places, limits),
+    ways: waySituations(found, places, limits),
+    rows: rowSituations(found, limits),
+    ...(route ? { route: routeStretches(found, route, limits) } : {}),
     ...(turningAt
-      ? { turning: { circleMm: clearCircle(found, turningAt), teeArmMm: clearTeeArm(found, turningAt) } }
+      ? {
+          turning: {
+            circleMm: clearCircle(found, turningAt, limits),
+            teeArmMm: clearTeeArm(found, turningAt, limits),
+          },
+        }
       : {}),
   };
 }
 
-function placeSituation(found: Survey, place: SurveyedPlace, sillReachMm: number): PlaceSituation {
+function placeSituation(found: Survey, place: SurveyedPlace): PlaceSituation {
   const { frame, piece } = place;
   const { thicknessMm, foam } = piece.seatCushion;
   return {
@@ -67,7 +89,7 @@ function placeSituation(found: Survey, place: SurveyedPlace, sillReachMm: number
     backLeanRad: radians(piece.backLeanDeg),
     backTopMm: piece.backHeightMm > 0 ? pressedSeatHeightMm(piece) + piece.backHeightMm : undefined,
     wallMm: wallsBeside(found, place),
-    sills: sillsBeside(found, place, sillReachMm),
+    sills: sillsBeside(found, place, SILL_REACH_MM),
     table: lapTable(found, place),
     overhead: overheadOf(found, place),
     overheadAhead: overheadAheadOf(found, place),

@@ -1,5 +1,6 @@
 import type { RouteStretch } from '@settlewright/anthropometry';
-import { isInTheWay, type Spot } from './clear-floor.ts';
+import { inTheWay, type Spot } from './clear-floor.ts';
+import type { Limits } from './limits.ts';
 import { legsOf, pinchesOf, type Pinch } from './pinches.ts';
 import { clipped, extent, type PlanFrame, type PlanSolid } from './plan.ts';
 import { solidsNear, type Survey } from './survey.ts';
@@ -23,23 +24,25 @@ const ROOM: PlanFrame = { xMm: 0, zMm: 0, facingRad: 0 };
  *
  * @param found - the survey
  * @param corners - corners of the route's line, at least two
+ * @param limits - of the rules
  * @returns stretches of one width, from the start to the end; width held to 3 m, 0 where something stands on the line
  */
-export function routeStretches(found: Survey, corners: readonly Spot[]): RouteStretch[] {
+export function routeStretches(found: Survey, corners: readonly Spot[], limits: Limits): RouteStretch[] {
   const stretches: RouteStretch[] = [];
   const legs = legsOf(corners);
+  const isObstacle = inTheWay(limits);
   const pinches = pinchesOf(
     legs,
-    solidsNear(found, ROOM, Infinity, () => true, isInTheWay),
+    solidsNear(found, ROOM, Infinity, () => true, isObstacle),
     2 * WIDEST_HALF_MM,
   );
   legs.forEach(({ plan, lengthMm }, leg) => {
     const before = legs[leg - 1];
     if (before !== undefined) {
-      const widthMm = turnWidth(found, plan, before.plan.facingRad, plan.facingRad);
+      const widthMm = turnWidth(found, isObstacle, plan, before.plan.facingRad, plan.facingRad);
       add(stretches, { widthMm, lengthMm: STEP_MM });
     }
-    const near = solidsNear(found, plan, lengthMm + WIDEST_HALF_MM, () => true, isInTheWay);
+    const near = solidsNear(found, plan, lengthMm + WIDEST_HALF_MM, () => true, isObstacle);
     const steps = Math.max(1, Math.ceil(lengthMm / STEP_MM));
     const widths = Array.from({ length: steps }, (_, n) =>
       clearWidth(near, [(n * lengthMm) / steps, ((n + 1) * lengthMm) / steps]),
@@ -62,12 +65,18 @@ function narrow(widths: number[], { fromMm, toMm, widthMm }: Pinch, stepMm: numb
 }
 
 /** Least width across a turn about a corner, from one heading to the next. */
-function turnWidth(found: Survey, corner: Spot, from: number, to: number): number {
+function turnWidth(
+  found: Survey,
+  isObstacle: (solid: PlanSolid) => boolean,
+  corner: Spot,
+  from: number,
+  to: number,
+): number {
   const turn = Math.atan2(Math.sin(to - from), Math.cos(to - from));
   const steps = Math.max(1, Math.ceil(Math.abs(turn) / TURN_STEP_RAD));
   const widths = Array.from({ length: steps - 1 }, (_, n) => {
     const plan = { ...corner, facingRad: from + ((n + 1) * turn) / steps };
-    const near = solidsNear(found, plan, WIDEST_HALF_MM, () => true, isInTheWay);
+    const near = solidsNear(found, plan, WIDEST_HALF_MM, () => true, isObstacle);
     return clearWidth(near, [-TURN_HALF_MM, TURN_HALF_MM]);
   });
   return Math.min(2 * WIDEST_HALF_MM, ...widths);

@@ -33,7 +33,7 @@ function sheetOf(document: SetDocument, people: { placeId: string; poplitealMm: 
     },
   }));
   const settings = { backPosture: 'dining', trafficBehind: 'none' } as const;
-  return checkSet({ situation: measureSet(document), sitters, ruleBook, model, settings });
+  return checkSet({ situation: measureSet(document, ruleBook), sitters, ruleBook, model, settings });
 }
 
 const at = (document: SetDocument, pressedMm: number): SetDocument => {

@@ -44,7 +44,7 @@ const sitters: Sitter[] = ['b1:1', 'b2:1'].map((placeId, i) => ({
 
 const check = (document: SetDocument): FitSheet =>
   checkSet({
-    situation: measureSet(document),
+    situation: measureSet(document, ruleBook),
     sitters,
     ruleBook,
     model,

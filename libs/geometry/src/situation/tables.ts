@@ -1,26 +1,11 @@
-import { MM_PER_INCH } from '../units/length-style.ts';
 import type { PlaceSituation, TableSituation } from '@settlewright/anthropometry';
 import type { PieceOf } from '../room/document.ts';
+import type { Limits } from './limits.ts';
 import { clipped, extent, inFrame, type PlanFrame, type PlanSolid } from './plan.ts';
 import { planOfPiece, solidsNear, type Survey, type SurveyedPlace } from './survey.ts';
 
 type Table = PieceOf<'table'>;
 type EdgeName = TableSituation['edges'][number]['name'];
-
-/** Legs deeper under the table than this are not between anybody's knees. */
-const KNEE_ZONE_MM = 300;
-/** Room outside the outermost leg narrower than this is of no use to a sitter. */
-const USABLE_END_MM = 300;
-/** Heights at which ADA 306.3 is asked: 9 to 27 in, every 3. */
-const ADA_HEIGHTS_MM = [9, 12, 15, 18, 21, 24, 27].map((inches) => inches * MM_PER_INCH);
-/** ADA 306: space deeper than 25 in below the edge does not count. */
-const ADA_DEEPEST_MM = 25 * MM_PER_INCH;
-/** ADA 306.3.5: knee clearance is 30 in wide. */
-const ADA_WIDTH_MM = 30 * MM_PER_INCH;
-/** ADA 306.2: toe clearance lies below 9 in. */
-const TOE_TOP_MM = 9 * MM_PER_INCH;
-/** ADA 306.3.3: the shallowest knee clearance, at 27 in. */
-const ADA_SHALLOWEST_MM = 8 * MM_PER_INCH;
 
 const HANGING = ['top', 'edge-lip', 'apron'];
 const FRONT: { name: EdgeName; turnRad: number } = { name: 'front', turnRad: 0 };
@@ -30,6 +15,12 @@ const EDGES: readonly (typeof FRONT)[] = [
   { name: 'left', turnRad: -Math.PI / 2 },
   { name: 'right', turnRad: Math.PI / 2 },
 ];
+
+/** Who sits at a table. */
+export interface TableDiners {
+  pieceId: string;
+  edges: Pick<TableSituation['edges'][number], 'name' | 'lengthMm' | 'placeIds'>[];
+}
 
 /** An edge of a table: origin at its middle, looking inwards under the top. */
 interface Edge {
@@ -43,16 +34,12 @@ interface Edge {
  *
  * @param found - the survey
  * @param places - the measured places
+ * @param limits - of the rules
  * @returns one entry a table
  */
-export function tableSituations(found: Survey, places: PlaceSituation[]): TableSituation[] {
-  const tables = found.document.pieces.filter((piece): piece is Table => piece.kind === 'table');
-  return tables.map((table) => {
-    const diners = found.places.filter((_, i) => places[i]?.table?.pieceId === table.id);
-    const edges = EDGES.map((one) => edgeOf(table, one)).map((edge) => ({
-      edge,
-      placeIds: diners.filter((place) => sitsAt(place, edge)).map(({ frame }) => frame.placeId),
-    }));
+export function tableSituations(found: Survey, places: PlaceSituation[], limits: Limits): TableSituation[] {
+  return tablesOf(found).map((table) => {
+    const edges = dinersAt(found, places, table);
     // A wheelchair needs an edge nobody else sits at.
     const open = edges.find(({ placeIds }) => placeIds.length === 0)?.edge ?? edgeOf(table, FRONT);
     return {
@@ -69,11 +56,43 @@ export function tableSituations(found: Survey, places: PlaceSituation[]): TableS
           name: edge.name,
           lengthMm: edge.lengthMm,
           placeIds,
-          clearBetweenLegsMm: clearBetweenLegs(found, table, edge),
+          clearBetweenLegsMm: clearBetweenLegs(found, table, edge, limits),
         })),
-      kneeSpace: kneeSpace(found, table, open),
+      kneeSpace: kneeSpace(found, table, open, limits),
     };
   });
+}
+
+/**
+ * Every table with the edges that somebody sits at.
+ *
+ * @param found - the survey
+ * @param places - the measured places
+ * @returns one entry a table
+ */
+export function tableDiners(found: Survey, places: PlaceSituation[]): TableDiners[] {
+  return tablesOf(found).map((table) => ({
+    pieceId: table.id,
+    edges: dinersAt(found, places, table)
+      .filter(({ placeIds }) => placeIds.length > 0)
+      .map(({ edge: { name, lengthMm }, placeIds }) => ({ name, lengthMm, placeIds })),
+  }));
+}
+
+const tablesOf = (found: Survey): Table[] =>
+  found.document.pieces.filter((piece): piece is Table => piece.kind === 'table');
+
+/** All edges of a table with whoever sits at each. */
+function dinersAt(
+  found: Survey,
+  places: PlaceSituation[],
+  table: Table,
+): { edge: Edge; placeIds: string[] }[] {
+  const diners = found.places.filter((_, i) => places[i]?.table?.pieceId === table.id);
+  return EDGES.map((one) => edgeOf(table, one)).map((edge) => ({
+    edge,
+    placeIds: diners.filter((place) => sitsAt(place, edge)).map(({ frame }) => frame.placeId),
+  }));
 }
 
 /** Width of the top between diners who face each other across it. */
@@ -108,16 +127,16 @@ function sitsAt(place: SurveyedPlace, edge: Edge): boolean {
 }
 
 /** Width along an edge that legs leave free, without useless ends outside the outermost legs. */
-function clearBetweenLegs(found: Survey, table: Table, edge: Edge): number {
+function clearBetweenLegs(found: Survey, table: Table, edge: Edge, { legs }: Limits): number {
   const half = edge.lengthMm / 2;
   const blocked = solidsNear(found, edge.plan, Infinity, (piece) => piece.id === table.id)
     .filter(({ role }) => role === 'leg' || role === 'column')
-    .map(({ outline }) => clipped(outline, { left: [-half, half], ahead: [0, KNEE_ZONE_MM] }))
+    .map(({ outline }) => clipped(outline, { left: [-half, half], ahead: [0, legs.kneeZoneMm] }))
     .filter((outline) => outline.length > 0)
     .map((outline) => extent(outline, 0));
   const free = freeStretches(-half, half, blocked);
   const clear = free.filter(
-    ([from, to]) => (from > -half && to < half) || to - from >= USABLE_END_MM || blocked.length === 0,
+    ([from, to]) => (from > -half && to < half) || to - from >= legs.usableEndMm || blocked.length === 0,
   );
   return clear.reduce((sum, [from, to]) => sum + to - from, 0);
 }
@@ -135,48 +154,53 @@ function freeStretches(from: number, to: number, blocked: (readonly [number, num
 }
 
 /** Knee and toe space below one edge, in the widest free stretch of it. */
-function kneeSpace(found: Survey, table: Table, edge: Edge): TableSituation['kneeSpace'] {
+function kneeSpace(
+  found: Survey,
+  table: Table,
+  edge: Edge,
+  { kneeSpace: { heightsMm, deepestMm, shallowestMm, widthMm: neededMm } }: Limits,
+): TableSituation['kneeSpace'] {
   const half = edge.lengthMm / 2;
-  const near = solidsNear(found, edge.plan, half + ADA_DEEPEST_MM, (piece) => piece.kind !== 'overhead');
+  const near = solidsNear(found, edge.plan, half + deepestMm, (piece) => piece.kind !== 'overhead');
   const underEdge = near.filter(
-    ({ outline }) => clipped(outline, { left: [-half, half], ahead: [0.01, ADA_DEEPEST_MM] }).length > 0,
+    ({ outline }) => clipped(outline, { left: [-half, half], ahead: [0.01, deepestMm] }).length > 0,
   );
   const legs = underEdge
     .filter(({ pieceId, role }) => !(pieceId === table.id && HANGING.includes(role)))
-    .map(({ outline }) => clipped(outline, { left: [-half, half], ahead: [0.01, ADA_SHALLOWEST_MM] }))
+    .map(({ outline }) => clipped(outline, { left: [-half, half], ahead: [0.01, shallowestMm] }))
     .filter((outline) => outline.length > 0)
     .map((outline) => extent(outline, 0));
   const stretches = freeStretches(-half, half, legs);
   const [widest] = [...stretches].sort((a, b) => b[1] - b[0] - (a[1] - a[0]));
   if (widest === undefined) {
-    const none = ADA_HEIGHTS_MM.map((heightMm) => ({ heightMm, depthMm: 0 }));
+    const none = heightsMm.map((heightMm) => ({ heightMm, depthMm: 0 }));
     return { clearHeightMm: 0, widthMm: 0, depthAt: none, toeDepthMm: 0 };
   }
   const widthMm = widest[1] - widest[0];
   const middle = (widest[0] + widest[1]) / 2;
-  const strip = Math.min(widthMm, ADA_WIDTH_MM) / 2;
+  const strip = Math.min(widthMm, neededMm) / 2;
   const left = [middle - strip + 1e-6, middle + strip - 1e-6] as const;
   const inStrip = underEdge
-    .map((solid) => ({ ...solid, outline: clipped(solid.outline, { left, ahead: [0.01, ADA_DEEPEST_MM] }) }))
+    .map((solid) => ({ ...solid, outline: clipped(solid.outline, { left, ahead: [0.01, deepestMm] }) }))
     .filter(({ outline }) => outline.length > 0);
-  const depth = (low: number, high: number) => nearest(inStrip, low, high);
+  const depth = (low: number, high: number) => nearest(inStrip, low, high, deepestMm);
   const roof = inStrip.filter(
     ({ pieceId, role, outline }) =>
-      pieceId === table.id && HANGING.includes(role) && extent(outline, 1)[0] < ADA_SHALLOWEST_MM,
+      pieceId === table.id && HANGING.includes(role) && extent(outline, 1)[0] < shallowestMm,
   );
   return {
     clearHeightMm: Math.min(table.heightMm - table.topThicknessMm, ...roof.map(({ bottomMm }) => bottomMm)),
     widthMm,
-    depthAt: ADA_HEIGHTS_MM.map((heightMm) => ({ heightMm, depthMm: depth(heightMm, heightMm) })),
-    toeDepthMm: depth(0, TOE_TOP_MM),
+    depthAt: heightsMm.map((heightMm) => ({ heightMm, depthMm: depth(heightMm, heightMm) })),
+    toeDepthMm: depth(0, heightsMm[0] ?? 0),
   };
 }
 
 /** From the edge to the nearest solid that reaches into a height range. */
-function nearest(solids: PlanSolid[], low: number, high: number): number {
+function nearest(solids: PlanSolid[], low: number, high: number, deepestMm: number): number {
   const depths = solids
     .filter(({ bottomMm, topMm }) => topMm > low + 1e-6 && bottomMm < high - 1e-6)
     .map(({ outline }) => extent(outline, 1)[0]);
-  const depth = Math.min(ADA_DEEPEST_MM, ...depths);
+  const depth = Math.min(deepestMm, ...depths);
   return depth < 0.02 ? 0 : depth;
 }

@@ -1,10 +1,15 @@
+import { loadRuleBook } from '@settlewright/anthropometry';
+import rules from '@settlewright/seed-data/fit-rules.json' with { type: 'json' };
 import { describe, expect, it } from 'vitest';
 import { benchLayout } from '../pieces/bench-layout.ts';
 import type { Piece, PieceKind, PieceOf, SetDocument } from '../room/document.ts';
 import { newPiece } from '../room/edit-pieces.ts';
 import { emptySetDocument, readSetDocument } from '../room/read-document.ts';
 import { setParameter } from '../pieces/parameters.ts';
-import { measureSet } from './measure-set.ts';
+import { measureSet as measured } from './measure-set.ts';
+
+const ruleBook = loadRuleBook(rules);
+const measureSet = (document: SetDocument) => measured(document, ruleBook);
 
 const IN = 25.4;
 

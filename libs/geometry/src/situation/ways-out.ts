@@ -1,22 +1,15 @@
 import { toPiece } from '../parts/placement.ts';
 import { benchLayout } from '../pieces/bench-layout.ts';
 import type { PieceKind, PieceOf } from '../room/document.ts';
-import { clipped, extent, type PlanSolid } from './plan.ts';
+import type { Limits } from './limits.ts';
+import { clipped, extent } from './plan.ts';
 import { planOfPiece, solidsNear, type Survey } from './survey.ts';
 
 type Bench = PieceOf<'bench'>;
 
-/** Floor before the seat that somebody needs to step out over, millimetres: shop rule. */
-const STEP_OUT_MM = 600;
-/** Nobody leaves through less than this: shop rule, a large man's depth and a little more. */
-const NARROWEST_MM = 300;
 const TOUCHING_MM = 1e-6;
-/** What ends lower or begins higher than this is stepped over or leaned under: shop rule. */
-const BODY_MM = [200, 1200] as const;
 /** Kinds that stand still; chairs are moved aside. */
 const STANDING: readonly PieceKind[] = ['bench', 'table', 'bulkhead', 'sill'];
-
-const standing = ({ bottomMm, topMm }: PlanSolid): boolean => topMm > BODY_MM[0] && bottomMm < BODY_MM[1];
 
 type Stretch = readonly [from: number, to: number];
 
@@ -25,22 +18,24 @@ type Stretch = readonly [from: number, to: number];
  *
  * @param found - the survey
  * @param bench - the bench
+ * @param limits - of rule EGRESS-08
  * @returns stretches along the bench's first plan axis, and which ends are open, first axis low and high
  */
 export function waysOff(
   found: Survey,
   bench: Bench,
+  { slidePast: { stepOutMm, narrowestMm, bodyMm } }: Limits,
 ): { fronts: Stretch[]; ends: { low: boolean; high: boolean } } {
   const front = benchLayout(bench).frontZMm;
   const half = bench.lengthMm / 2;
   const near = solidsNear(
     found,
     planOfPiece(bench),
-    half + front + STEP_OUT_MM + NARROWEST_MM,
+    half + front + stepOutMm + narrowestMm,
     (piece) => piece.id !== bench.id && STANDING.includes(piece.kind),
-    standing,
+    ({ bottomMm, topMm }) => topMm > bodyMm[0] && bottomMm < bodyMm[1],
   );
-  const ahead = [front, front + STEP_OUT_MM] as const;
+  const ahead = [front, front + stepOutMm] as const;
   const blocked = near
     .map(({ outline }) => clipped(outline, { left: [-half, half], ahead }))
     .filter((outline) => outline.length > 0)
@@ -49,14 +44,14 @@ export function waysOff(
   const fronts: Stretch[] = [];
   let from = -half;
   for (const [low, high] of [...blocked, [half, half]] as Stretch[]) {
-    if (low - from >= NARROWEST_MM - TOUCHING_MM) fronts.push([from, low]);
+    if (low - from >= narrowestMm - TOUCHING_MM) fronts.push([from, low]);
     from = Math.max(from, high);
   }
   const isOpen = (left: Stretch) =>
-    !near.some(({ outline }) => clipped(outline, { left, ahead: [front, front + NARROWEST_MM] }).length > 0);
+    !near.some(({ outline }) => clipped(outline, { left, ahead: [front, front + narrowestMm] }).length > 0);
   return {
     fronts,
-    ends: { low: isOpen([-half - NARROWEST_MM, -half]), high: isOpen([half, half + NARROWEST_MM]) },
+    ends: { low: isOpen([-half - narrowestMm, -half]), high: isOpen([half, half + narrowestMm]) },
   };
 }
 
@@ -65,10 +60,11 @@ export function waysOff(
  *
  * @param found - the survey
  * @param bench - the bench
+ * @param limits - of rule EGRESS-08
  * @returns whole people; undefined when nothing leads off the bench
  */
-export function peopleToSlidePast(found: Survey, bench: Bench): number | undefined {
-  const { fronts, ends } = waysOff(found, bench);
+export function peopleToSlidePast(found: Survey, bench: Bench, limits: Limits): number | undefined {
+  const { fronts, ends } = waysOff(found, bench, limits);
   const half = bench.lengthMm / 2;
   const ways: Stretch[] = [
     ...fronts,

@@ -1,9 +1,9 @@
-import type { FitCell, FitSheet, SetSituation } from '@settlewright/anthropometry';
+import type { FitCell, FitSheet } from '@settlewright/anthropometry';
 import type { MannequinPose } from '../mannequin/pose.ts';
 import { placeFramesOf, type PlaceFrame } from '../pieces/place-frames.ts';
 import { referenceSinkMm } from '../pieces/seat-sink.ts';
 import type { SetDocument } from '../room/document.ts';
-import { measureSet } from '../situation/measure-set.ts';
+import { measureSet, type SeatSituation } from '../situation/measure-set.ts';
 import { GAP_OF_RULE } from './gap-tapes.ts';
 import { pieceTapes } from './piece-tapes.ts';
 import { seatView } from './seat-view.ts';
@@ -47,7 +47,7 @@ function rowTapes(
   document: SetDocument,
   row: FitSheet['rows'][number],
   frame: PlaceFrame | undefined,
-  { places }: SetSituation,
+  { places }: SeatSituation,
   bodies: readonly TapeBody[],
 ): TapeLine[] {
   const place = places.find(({ placeId }) => placeId === row.placeId);
@@ -84,7 +84,7 @@ function gapTape(
 }
 
 /** Knee space between two benches, from seat front to seat front. */
-function facingTape(cell: FitCell, situation: SetSituation, frames: Map<string, PlaceFrame>): TapeLine[] {
+function facingTape(cell: FitCell, situation: SeatSituation, frames: Map<string, PlaceFrame>): TapeLine[] {
   if (cell.ruleId !== 'SIDE-04' || cell.outcome.kind !== 'verdict') return [];
   const facing = situation.facing.find(({ pieceIds }) => pieceIds.every((id) => cell.pieceIds.includes(id)));
   const pair =

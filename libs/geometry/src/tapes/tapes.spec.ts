@@ -36,7 +36,7 @@ const PEOPLE: KnownPerson[] = [1520, 1850].map((mm, i) => ({
 
 /** A set with people at its first places: sheet, posed bodies and tapes. */
 function seated(document: SetDocument, selected?: string) {
-  const situation = measureSet(document);
+  const situation = measureSet(document, ruleBook);
   const frames = placeFramesOf(document);
   const sitters: Sitter[] = PEOPLE.map((person, i) => ({
     id: `s${i}`,

@@ -113,7 +113,7 @@ export function createPictureMaker(
   const makeBody = createBodyMaker();
 
   function situationOf(document: SetDocument): SetSituation {
-    const situation = situations.get(document) ?? measureSet(document);
+    const situation = situations.get(document) ?? measureSet(document, engine.ruleBook);
     situations.set(document, situation);
     return situation;
   }

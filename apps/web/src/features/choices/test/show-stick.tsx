@@ -49,7 +49,7 @@ const MARCUS: Seated = { id: 'marcus', name: 'Marcus Adeyemi-Rowe', person: pers
 export function checkOf(people: readonly Seated[]): ChoicesView['check'] {
   const sheets = new WeakMap<SetDocument, FitSheet>();
   return (document) => {
-    const situation = measureSet(document);
+    const situation = measureSet(document, ruleBook);
     const sitters = people.map((one, n): Sitter => ({
       ...one,
       kind: 'cast',

@@ -58,7 +58,7 @@ function sittersAt(document: SetDocument): Sitter[] {
 
 export const check = (document: SetDocument): FitSheet =>
   checkSet({
-    situation: measureSet(document),
+    situation: measureSet(document, ruleBook),
     sitters: sittersAt(document),
     ruleBook,
     model,
@@ -69,7 +69,7 @@ export const sheet = check(facingBenches);
 
 /** What the rows are made from, as the room hands it on. */
 export const basis: NonNullable<FitView['basis']> = {
-  situation: measureSet(facingBenches),
+  situation: measureSet(facingBenches, ruleBook),
   sitters: sittersAt(facingBenches),
   people: sittersAt(facingBenches).map(({ id, name, person }) => ({ id, name, person })),
   model,

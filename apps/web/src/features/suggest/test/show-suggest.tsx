@@ -39,7 +39,7 @@ const seated = (name: string, placeId: string, bodyData: 'women' | 'men', percen
 export const sitters = [seated('Hetty', 'b1:1', 'women', 2), seated('Marcus', 'b2:1', 'men', 98)];
 
 export const check = (document: SetDocument): FitSheet =>
-  checkSet({ situation: measureSet(document), sitters, ruleBook, model, settings: document.asked });
+  checkSet({ situation: measureSet(document, ruleBook), sitters, ruleBook, model, settings: document.asked });
 
 const FEW = 40;
 
