@@ -6,6 +6,8 @@ export interface CastPerson {
   id: string;
   name: string;
   person: KnownPerson;
+  /** Erased: a place may still name them, and no body is behind it. */
+  noBody?: true;
 }
 
 export function castPerson(member: CastMember): CastPerson {
@@ -13,6 +15,7 @@ export function castPerson(member: CastMember): CastPerson {
   return {
     id: member.id,
     name: member.name,
+    ...(member.removedAt ? { noBody: true as const } : {}),
     person: {
       bodyData: member.bodyData,
       ...(member.statureMm === null

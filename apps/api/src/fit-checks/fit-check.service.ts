@@ -70,7 +70,7 @@ export class FitCheckService {
     const input = { situation: measureSet(document, ruleBook), ruleBook, model, settings };
     const asked = digest([document, confidence]);
     for (const sitter of this.sitters(document, cast)) {
-      if (sitter.kind !== 'cast') continue;
+      if (sitter.kind !== 'cast' || sitter.noBody) continue;
       const key = digest([asked, sitter.placeId, sitter.person]);
       let next = this.recent.get(key);
       if (!next) {
@@ -92,11 +92,11 @@ export class FitCheckService {
     }
   }
 
-  /** A body for each taken place, as far as everybody in the workshop may see it. */
+  /** A body for each taken place that has one, as far as everybody in the workshop may see it. */
   bodiesFor(document: SetDocument, cast: readonly CastPerson[]): RoundedBody[] {
-    return this.sitters(document, cast).map(({ placeId, person }) =>
-      roundedBody(placeId, person, this.model.predict(person).means()),
-    );
+    return this.sitters(document, cast)
+      .filter(({ noBody }) => !noBody)
+      .map(({ placeId, person }) => roundedBody(placeId, person, this.model.predict(person).means()));
   }
 
   private sitters(document: SetDocument, cast: readonly CastPerson[]): Sitter[] {

@@ -49,6 +49,20 @@ const anyone = fc.record({
 }) as fc.Arbitrary<Partial<KnownPerson>>;
 
 describe('the sheet', () => {
+  it('knows no check of a place that nobody is behind, whatever would hold of anybody', () => {
+    const nobody: KnownPerson = { bodyData: 'mixed', measured: {}, shoeMm: 25, clothing: 'light' };
+    const row = (noBody: boolean) =>
+      check(set({ places: [furnished()] }), [{ ...sitter(nobody), ...(noBody ? { noBody: true } : {}) }])
+        .rows[0];
+    const verdicts = (noBody: boolean) =>
+      row(noBody)?.cells.flatMap(({ outcome }) => (outcome.kind === 'verdict' ? [outcome.verdict] : [])) ??
+      [];
+    expect(verdicts(false)).toContain('fits');
+    expect(verdicts(true)).toHaveLength(verdicts(false).length);
+    expect(new Set(verdicts(true))).toEqual(new Set(['notKnown']));
+    expect(row(true)?.worst).toBe('notKnown');
+  });
+
   it('gives every row and the public row the same columns', () => {
     const places = [furnished(), place({ placeId: 'b1:2', place: 2 })];
     const sheet = check(set({ places }), [sitter(person()), sitter(person(), 'b1:2', 'Bo')]);

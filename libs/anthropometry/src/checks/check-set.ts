@@ -116,7 +116,7 @@ function rowOf(
       sitterId: sitter.id,
       ...cellPieces(place, placed.pieces),
       ...(placed.side ? { side: placed.side } : {}),
-      outcome: placed.outcome,
+      outcome: sitter.noBody ? untold(placed.outcome) : placed.outcome,
     };
   });
   const found = new Set(
@@ -133,6 +133,10 @@ function rowOf(
     worst: WORST_FIRST.find((verdict) => found.has(verdict)) ?? 'notKnown',
   };
 }
+
+/** A verdict about nobody: there is no body to measure either. */
+const untold = (outcome: Outcome): Outcome =>
+  outcome.kind === 'verdict' ? { ...outcome, verdict: 'notKnown', estimated: true, settleWith: [] } : outcome;
 
 interface Answered {
   outcome: Outcome;

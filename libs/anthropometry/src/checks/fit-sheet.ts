@@ -101,6 +101,8 @@ export interface Sitter {
   kind: 'cast' | 'mannequin';
   placeId: string;
   person: KnownPerson;
+  /** Nobody is behind the name any more: no check at the place is known, whatever would hold of just anybody. */
+  noBody?: true;
 }
 
 /** One row of the grid: a sitter at a place. */

@@ -96,6 +96,8 @@ export interface RuleBook {
   confidenceSource: Rule['sources'][number];
   /** How far past a line still counts as on it. */
   boundaryTolerance: Record<RuleUnit, number>;
+  /** From which difference between two bodies, in what a check reads, one of them says little by sitting for the other. */
+  standIn: { littleSaidMm: number; source: Rule['sources'][number] };
   practices: Practice[];
   conflicts: RuleConflict[];
   rules: Rule[];
@@ -159,6 +161,7 @@ const bookSchema = z.object({
     deg: z.number().nonnegative(),
     count: z.number().nonnegative(),
   }),
+  standIn: z.object({ littleSaidMm: z.number().positive(), source: sourceSchema }),
   practices: z.array(
     z.object({
       id: z.string().min(1),
@@ -187,8 +190,7 @@ export function loadRuleBook(json: unknown): RuleBook {
     const [issue] = parsed.error.issues;
     throw new Error(`Fit rules: ${issue?.path.join('.') ?? ''}: ${issue?.message ?? 'not readable'}`);
   }
-  const { version, confidence, confidenceSource, boundaryTolerance, practices, conflicts, rules } =
-    parsed.data;
+  const { conflicts, rules } = parsed.data;
   const byId = new Map(rules.map((rule) => [rule.id, rule]));
   if (byId.size !== rules.length)
     throw new Error('Fit rules: two rules carry the same id; accepted: one each');
@@ -198,13 +200,7 @@ export function loadRuleBook(json: unknown): RuleBook {
   if (unknown !== undefined)
     throw new Error(`Fit rules: a conflict names ${unknown}; accepted: a rule of the book`);
   return {
-    version,
-    confidence,
-    confidenceSource,
-    boundaryTolerance,
-    practices,
-    conflicts,
-    rules,
+    ...parsed.data,
     rule(id) {
       const rule = byId.get(id);
       if (!rule) throw new RangeError(`Fit rules: no rule ${id}; accepted: ${[...byId.keys()].join(', ')}`);

@@ -56,6 +56,8 @@ describe('a stand-in tries the seat', () => {
       for (const check of asked) {
         expect(check.answer, check.ruleId).toBe('carriesOver');
         expect(check.side, check.ruleId).toBe('same');
+        expect(check.because, check.ruleId).toBe('bodies');
+        expect(check.saysLittle, check.ruleId).toBe(false);
         for (const spread of [check.difference, ...check.parts]) {
           expect(spread?.best, check.ruleId).toBeCloseTo(0, 6);
           expect((spread?.high ?? 1) - (spread?.low ?? 0), check.ruleId).toBeCloseTo(0, 6);
@@ -95,6 +97,30 @@ describe('a stand-in tries the seat', () => {
     expect(high.misleads || high.answer !== 'carriesOver').toBe(true);
   });
 
+  it('carries over by room alone where there is much of it, and then says how the bodies differ', () => {
+    const roomy = place({ table: lapTable({ undersideMm: 760, topMm: 790 }) });
+    const her = person({ shoeMm: 25, measured: { knee_height_sitting: 500 } });
+    const by = (differenceMm: number) =>
+      of(
+        tried(her, person({ shoeMm: 25, measured: { knee_height_sitting: 500 + differenceMm } }), roomy),
+        'TABLE-02',
+      );
+    expect(by(0)).toMatchObject({ answer: 'carriesOver', because: 'bodies', saysLittle: false });
+    expect(by(30)).toMatchObject({ answer: 'carriesOver', because: 'room', saysLittle: false });
+    expect(by(-30).because).toBe('room');
+    const { littleSaidMm } = ruleBook.standIn;
+    expect(by(littleSaidMm).saysLittle).toBe(false);
+    expect(by(littleSaidMm + 1)).toMatchObject({ answer: 'carriesOver', because: 'room', saysLittle: true });
+    expect(by(-littleSaidMm - 1).saysLittle).toBe(true);
+  });
+
+  it('says little of the seat depth of somebody with much shorter thighs, however much room there is', () => {
+    const shallow = place({ effectiveDepthMm: 330 });
+    const her = person({ measured: { buttock_popliteal_length: 420 } });
+    const him = person({ measured: { buttock_popliteal_length: 560 } });
+    expect(of(tried(her, him, shallow), 'SEAT-04')).toMatchObject({ saysLittle: true });
+  });
+
   it('adds by hand: knees of 500 and 560, shoes of 25 and 40', () => {
     const her = person({ shoeMm: 25, measured: { knee_height_sitting: 500 } });
     const him = person({ shoeMm: 40, measured: { knee_height_sitting: 560 } });
@@ -103,7 +129,9 @@ describe('a stand-in tries the seat', () => {
     expect(knees.difference).toEqual({ best: 75, low: 75, high: 75 });
     expect(knees.parts).toEqual([{ key: 'knee_height_sitting', best: 60, low: 60, high: 60 }]);
     expect(knees.answer).toBe('withDifference');
+    expect(knees.because).toBeUndefined();
     expect(knees.misleads).toBe(true);
+    expect(knees.saysLittle).toBe(true);
   });
 
   it('says so where the weights decide how far the cushion goes down', () => {

@@ -5,6 +5,7 @@ import { minus, ofBody, type Amount } from './amount.ts';
 import { judgementOf, worstFirst, type CheckInput, type Found } from './check-set.ts';
 import { sinkUnder, type PersonCheck, type Said } from './person-check.ts';
 import { PERSON_CHECKS } from './person-checks.ts';
+import type { Rule } from './rule-book.ts';
 import type { PlaceSituation } from './situation.ts';
 import { differenceOf, shareSettledBy, type Difference, type Spread } from './stand-in-difference.ts';
 import { failLines, type Judgement, type Question } from './verdict.ts';
@@ -36,6 +37,13 @@ export interface StandInCheck {
   difference?: Spread;
   /** Room to the nearest fail line that the drawing gives each of them. */
   room?: { castMember: number; standIn: number };
+  /**
+   * What an answer that carries over rests on. `bodies`: the two do not differ in what the check reads. `room`: they
+   * may, and both still have room as drawn, or neither has; the sit by itself shows no more than that.
+   */
+  because?: 'bodies' | 'room';
+  /** The bodies differ here by more than the rule book lets a sit be carried over; whatever the answer, the sit says little. */
+  saysLittle: boolean;
   /** The sit by itself would show the wrong thing with the probability that a verdict asks for. */
   misleads: boolean;
   /**
@@ -66,6 +74,9 @@ const TAKEABLE = new Set<MeasureKey>(['stature', 'weight_kg', ...TAPE_MEASURE_KE
  *
  * Rules whose limit is a share of a body measure (BACK-03, SEAT-04, TABLE-05) are compared by the room to the fail
  * line, not by the bare gap.
+ *
+ * Two bodies far apart do not sit a seat alike: a knee over the edge, a back off the rest. No sum makes up for that, so
+ * from the difference that the rule book names (`standIn`) the sit says little, even where there is room for both.
  *
  * @param input - place (millimetres), both people, rules, body model and settings; other seats do not matter
  * @returns one entry a rule of a person, in the order of the sheet
@@ -113,19 +124,30 @@ function checkFor(input: Input, check: PersonCheck, bodies: Bodies): StandInChec
   const other = standInSaid[castSaid.indexOf(castMember.answer)];
   if (!other) return silent(rule.id, castSaid);
   const [sat] = worstFirst([other], judgement);
-  return compared(rule.id, { castMember, standIn: sat }, bodies, judgement);
+  return compared(rule, { castMember, standIn: sat }, bodies, {
+    ...judgement,
+    littleSaidMm: input.ruleBook.standIn.littleSaidMm,
+  });
 }
 
 function silent(ruleId: string, said: Said): StandInCheck {
   const reason = 'reason' in said ? said.reason : 'no verdict is given here';
-  return { ruleId, answer: 'notAsked', reason, parts: [], misleads: false, side: 'notKnown' };
+  return {
+    ruleId,
+    answer: 'notAsked',
+    reason,
+    parts: [],
+    saysLittle: false,
+    misleads: false,
+    side: 'notKnown',
+  };
 }
 
 function compared(
-  ruleId: string,
+  { id: ruleId, unit }: Rule,
   { castMember, standIn: sat }: Record<keyof Bodies, Found>,
   bodies: Bodies,
-  { confidence, tolerance }: Judgement,
+  { confidence, tolerance, littleSaidMm }: Judgement & { littleSaidMm: number },
 ): StandInCheck {
   const { side, margin } = castMember.finding;
   const rooms = {
@@ -140,6 +162,7 @@ function compared(
   const inside = difference.atLeast(difference.spread.best - margin - tolerance);
   const told = Math.max(inside, 1 - inside) >= asked;
   const answer = agree >= asked ? 'carriesOver' : told ? 'withDifference' : 'cannotTell';
+  const lean = sideOf(difference, tolerance, asked);
   const take = answer === 'cannotTell' ? bestTaken(change, bodies) : undefined;
   return {
     ruleId,
@@ -147,8 +170,10 @@ function compared(
     parts: partsOf(rooms, bodies),
     difference: difference.spread,
     room: { castMember: margin, standIn: sat.finding.margin },
+    ...(answer === 'carriesOver' ? { because: lean === 'same' ? 'bodies' : 'room' } : {}),
+    saysLittle: unit === 'mm' && Math.abs(difference.spread.best) > littleSaidMm,
     misleads: 1 - agree >= asked,
-    side: sideOf(difference, tolerance, asked),
+    side: lean,
     ...(take ? { take } : {}),
   };
 }

@@ -147,10 +147,12 @@ export function createPictureMaker(
       );
     }
     return new Map(
-      sittersOf(document, cast, engine.model).map(({ placeId, person }) => {
+      sittersOf(document, cast, engine.model).flatMap(({ placeId, person, noBody }) => {
+        if (noBody) return [];
         const body = engine.model.predict(person);
+        const { weightKg } = body;
         const estimated = !person.exact && Object.keys(person.measured).length === 0;
-        return [placeId, { means: body.means(), shoeMm: person.shoeMm, weightKg: body.weightKg, estimated }];
+        return [[placeId, { means: body.means(), shoeMm: person.shoeMm, weightKg, estimated }]];
       }),
     );
   }

@@ -21,6 +21,8 @@ export interface RoomForSuggest {
   replace?: (document: SetDocument, step: string) => void;
   /** Everyone whose body is known here; nobody for readers without measures. */
   sitters: Sitter[];
+  /** Places that name somebody who was removed. */
+  placesWithoutBody: number;
   ruleBook: RuleBook;
   style: LengthStyle;
   colourOf: (sitterId: string) => number;
@@ -33,6 +35,8 @@ export function useRoomForSuggest(): RoomForSuggest {
   const draftNumber = useStore(useAutosave().state, (state) => state.base.number);
   return useMemo(() => {
     const seatOf = new Map(document.seating.map((seat) => [`${seat.pieceId}:${seat.place}`, seat.sitter]));
+    const seated = sittersOf(document, cast, engine.model);
+    const sitters = seated.filter(({ noBody }) => !noBody);
     const placeOf = new Map(sheet.rows.map((row) => [row.sitterId, row.placeId]));
     return {
       setId: path.setId,
@@ -43,7 +47,8 @@ export function useRoomForSuggest(): RoomForSuggest {
       sheet,
       check: maker.check,
       ...(canEdit && { replace: take }),
-      sitters: sittersOf(document, cast, engine.model),
+      sitters,
+      placesWithoutBody: seated.length - sitters.length,
       ruleBook: engine.ruleBook,
       style,
       colourOf: (sitterId) => {

@@ -52,7 +52,7 @@ export function personOf(member: CastMember): KnownPerson | undefined {
 
 const people = new WeakMap<CastMember, KnownPerson | undefined>();
 
-/** Everyone who sits in the document and whose body is known here. */
+/** Everyone who sits in the document and whose body is known here; an erased person keeps the place without a body. */
 export function sittersOf(document: SetDocument, cast: readonly CastMember[], model: BodyModel): Sitter[] {
   return document.seating.flatMap(({ pieceId, place, sitter }): Sitter[] => {
     const placeId = `${pieceId}:${place}`;
@@ -66,6 +66,8 @@ export function sittersOf(document: SetDocument, cast: readonly CastMember[], mo
     if (!member) return [];
     if (!people.has(member)) people.set(member, personOf(member));
     const person = people.get(member);
-    return person ? [{ id: member.id, name: member.name, kind: 'cast', placeId, person }] : [];
+    if (!person) return [];
+    const { id, name, removed } = member;
+    return [{ id, name, kind: 'cast', placeId, person, ...(removed ? { noBody: true } : {}) }];
   });
 }

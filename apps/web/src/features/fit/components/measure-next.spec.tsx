@@ -4,7 +4,7 @@ import { screen, within } from '@testing-library/react';
 import { MemoryRouter } from 'react-router-dom';
 import { describe, expect, it, vi } from 'vitest';
 import { answerNext, type NextQuestion } from '../next/next-question.ts';
-import { basis, showSheet } from '../test/show-sheet.tsx';
+import { basis, sheet, showSheet } from '../test/show-sheet.tsx';
 import { MeasureNext, MeasureNextLine } from './measure-next.tsx';
 
 // There is no worker here; the same question is answered on the spot.
@@ -30,6 +30,16 @@ describe('MeasureNext', { timeout: 30_000 }, () => {
     const [first] = line.getAllByRole('link');
     expect(first).toHaveAttribute('href', expect.stringMatching(/^\/people\?edit=marcus&field=[a-z_]+$/));
     expect(line.getByText(/(settles about|may settle) .* in doubt/)).toBeVisible();
+  });
+
+  it('names nobody whose body is gone, and says that a place has none', async () => {
+    const [hetty, marcus] = basis.sitters;
+    if (!hetty || !marcus) throw new Error('Two sit here.');
+    const gone = { ...basis, sitters: [{ ...hetty, noBody: true as const }, marcus] };
+    showSheet(list, { sheet: structuredClone(sheet), basis: gone, personTo });
+    await screen.findByText('Marcus Adeyemi-Rowe', {}, { timeout: 20_000 });
+    expect(screen.queryByText('Hetty Vance')).toBeNull();
+    expect(screen.getByText(/^1 place has no body behind it/)).toBeVisible();
   });
 
   it('says the same in one line', async () => {

@@ -2,6 +2,7 @@ import type { NextMeasures, SitterRow } from '@settlewright/anthropometry';
 import { Fragment } from 'react';
 import { RuleHeading } from '@/components/rule-heading.tsx';
 import { SitterDot } from '@/components/sitter-dot.tsx';
+import { noBodyWords } from '@/lib/no-body-words.ts';
 import { settlesWords } from '@/lib/settles-words.ts';
 import { useFitView } from '../fit-view.ts';
 import { useNextMeasures } from '../next/use-next-measures.ts';
@@ -34,7 +35,8 @@ function useLines(): Found[] {
 
 /** The one or two measurements of each sitter that settle most. */
 export function MeasureNext() {
-  const { colourOf } = useFitView();
+  const { basis, colourOf } = useFitView();
+  const withoutBody = basis?.sitters.filter(({ noBody }) => noBody).length ?? 0;
   const lines = useLines();
   if (lines.length === 0) return null;
   return (
@@ -59,6 +61,7 @@ export function MeasureNext() {
           </li>
         ))}
       </ul>
+      {withoutBody > 0 && <p className="mt-2 text-sm text-ink-2">{noBodyWords(withoutBody)}</p>}
     </section>
   );
 }

@@ -70,4 +70,4 @@ function questionsOf(
 }
 
 const isOpen = (row: SitterRow, sitter: Sitter, confidence: number): boolean =>
-  sitter.kind === 'cast' && row.cells.some((cell) => isUncertainCell(cell, confidence));
+  sitter.kind === 'cast' && !sitter.noBody && row.cells.some((cell) => isUncertainCell(cell, confidence));

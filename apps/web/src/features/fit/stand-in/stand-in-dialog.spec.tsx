@@ -24,6 +24,17 @@ describe('StandInDialog', () => {
     expect(
       group.getAllByText(/this sit cannot tell\. (Tape|Weigh) (Hetty|the stand-in)/).length,
     ).toBeGreaterThan(0);
+    const little = await screen.findByRole('heading', { name: /^Says little/ });
+    expect(
+      within(little.closest('section') as HTMLElement).getAllByText(
+        /says little: the stand-in and Hetty differ here by .* \(shop rule\)/,
+      ).length,
+    ).toBeGreaterThan(0);
+    expect(
+      screen.getAllByText(
+        /holds for Hetty because of the room there is, .* although their bodies differ here/,
+      ).length,
+    ).toBeGreaterThan(0);
     expect(screen.queryByText(/\bThe’s\b|at The\b/)).toBeNull();
     // Her back of knee was taken, his is predicted from a height half a head above hers.
     expect(screen.getAllByText(/back of knee \+/).length).toBeGreaterThan(0);

@@ -1,4 +1,4 @@
-import { standIn, type StandInAnswer, type StandInCheck } from '@settlewright/anthropometry';
+import { standIn, type StandInCheck } from '@settlewright/anthropometry';
 import { useState } from 'react';
 import { Dialog } from '@/components/dialog.tsx';
 import { RuleHeading } from '@/components/rule-heading.tsx';
@@ -9,14 +9,29 @@ import { partWords, standInWords, type Pair } from './stand-in-words.ts';
 
 const STRANGER = 'stranger';
 
-const GROUPS: readonly { answer: StandInAnswer; title: string }[] = [
-  { answer: 'cannotTell', title: 'This sit cannot tell' },
-  { answer: 'withDifference', title: 'Tells once the difference is counted' },
-  { answer: 'carriesOver', title: 'Can be trusted as it is' },
+const GROUPS: readonly { title: string; holds: (check: StandInCheck) => boolean }[] = [
+  { title: 'This sit cannot tell', holds: ({ answer }) => answer === 'cannotTell' },
+  {
+    title: 'Says little, the bodies differ too much',
+    holds: ({ answer, saysLittle }) => saysLittle && answer !== 'cannotTell',
+  },
+  {
+    title: 'Tells once the difference is counted',
+    holds: ({ answer, saysLittle }) => answer === 'withDifference' && !saysLittle,
+  },
+  {
+    title: 'Can be trusted because there is room',
+    holds: ({ because, saysLittle }) => because === 'room' && !saysLittle,
+  },
+  {
+    title: 'Can be trusted as it is',
+    holds: ({ because, saysLittle }) => because === 'bodies' && !saysLittle,
+  },
 ];
 
 function Group({ title, checks, pair }: { title: string; checks: readonly StandInCheck[]; pair: Pair }) {
   const { ruleBook, style } = useFitView();
+  const { littleSaidMm } = ruleBook.standIn;
   if (checks.length === 0) return null;
   return (
     <section className="mt-5">
@@ -31,7 +46,7 @@ function Group({ title, checks, pair }: { title: string; checks: readonly StandI
             <li key={check.ruleId} className="border-b border-rule py-2">
               <p>
                 <strong className="font-semibold">{rule.columnName}:</strong>{' '}
-                {standInWords(check, pair, rule.unit, style)}
+                {standInWords(check, pair, { unit: rule.unit, style, littleSaidMm })}
               </p>
               {parts.length > 0 && (
                 <p className="text-sm text-ink-2">
@@ -49,7 +64,7 @@ function Group({ title, checks, pair }: { title: string; checks: readonly StandI
 
 function Trial({ basis }: { basis: FitBasis }) {
   const { ruleBook, sheet } = useFitView();
-  const seats = basis.sitters.filter(({ kind }) => kind === 'cast');
+  const seats = basis.sitters.filter(({ kind, noBody }) => kind === 'cast' && !noBody);
   const [seatAt, setSeatAt] = useState(seats[0]?.placeId ?? '');
   const [who, setWho] = useState(STRANGER);
   const [stranger, setStranger] = useState(blankStranger);
@@ -95,13 +110,8 @@ function Trial({ basis }: { basis: FitBasis }) {
       <div aria-live="polite">
         {!known && <p className="mt-5 text-ink-2">Type a height to see what the sit is worth.</p>}
         {checks.length > 0 &&
-          GROUPS.map(({ answer, title }) => (
-            <Group
-              key={answer}
-              title={title}
-              pair={pair}
-              checks={checks.filter((check) => check.answer === answer)}
-            />
+          GROUPS.map(({ title, holds }) => (
+            <Group key={title} title={title} pair={pair} checks={checks.filter(holds)} />
           ))}
       </div>
     </>

@@ -16,16 +16,70 @@ export interface Pair {
 
 const capital = (words: string): string => words.charAt(0).toUpperCase() + words.slice(1);
 
+/** Units of the rule and the reader, and from which difference a sit says little. */
+export interface Said {
+  unit: RuleUnit;
+  style: LengthStyle;
+  littleSaidMm: number;
+}
+
 /** What one sit says of one check, in a sentence or two. */
-export function standInWords(check: StandInCheck, pair: Pair, unit: RuleUnit, style: LengthStyle): string {
+export function standInWords(check: StandInCheck, pair: Pair, said: Said): string {
   const them = shortName(pair.castMember);
   const sitter = pair.standIn === undefined ? 'the stand-in' : shortName(pair.standIn);
-  if (check.answer === 'carriesOver') {
-    return `what ${sitter} finds holds for ${them}.${sideWords(check, them, sitter)}`;
-  }
+  const side = sideWords(check, them, sitter);
   if (check.answer === 'cannotTell') return `this sit cannot tell. ${instead(check, them, sitter)}`.trim();
+  if (check.saysLittle) return littleWords(check, them, sitter, said);
+  if (check.answer === 'carriesOver') {
+    const because = check.because === 'room' ? roomWords(check, said) : '';
+    return `what ${sitter} finds holds for ${them}${because}.${side}`;
+  }
   const misleads = check.misleads ? `by itself the sit misleads. ` : '';
-  return `${misleads}${correction(check, them, sitter, unit, style)}${sideWords(check, them, sitter)}`;
+  return `${misleads}${correction(check, them, sitter, said)}${side}`;
+}
+
+/** " because of the room there is, about 3″ or more for either, although their bodies differ here by about 1″". */
+function roomWords({ room, difference }: StandInCheck, { unit, style }: Said): string {
+  if (!room || !difference) return '';
+  const { castMember, standIn } = room;
+  const show = (value: number) => amountText(Math.abs(value), unit, style);
+  const ground =
+    castMember < 0 && standIn < 0
+      ? `only because both are short of room, by about ${show(Math.max(castMember, standIn))} or more`
+      : `because of the room there is, about ${show(Math.max(0, Math.min(castMember, standIn)))} or more for either`;
+  return ` ${ground}, although their bodies differ here ${apartWords(difference, { unit, style })}`;
+}
+
+/** "by about 1⅜″ (1 to 1¾″)", "by up to 2″ either way". */
+function apartWords(
+  { best, low, high }: NonNullable<StandInCheck['difference']>,
+  { unit, style }: Pick<Said, 'unit' | 'style'>,
+): string {
+  const show = (value: number) => amountText(Math.abs(value), unit, style);
+  if (high - low < 1) return `by ${show(best)}`;
+  if (low < 0 && high > 0) return `by up to ${show(Math.max(-low, high))}, either of them having more`;
+  const [least, most] = [Math.abs(low), Math.abs(high)].sort((a, b) => a - b);
+  return `by about ${show(best)} (${show(least as number)} to ${show(most as number)})`;
+}
+
+/** Bodies that differ too much: what is known then comes from the drawing, not from the sit. */
+function littleWords(
+  { difference, room }: StandInCheck,
+  them: string,
+  sitter: string,
+  { unit, style, littleSaidMm }: Said,
+): string {
+  if (!difference || !room) return '';
+  const show = (value: number) => amountText(Math.abs(value), unit, style);
+  const drawn =
+    room.castMember < 0
+      ? `is about ${show(room.castMember)} short`
+      : `has about ${show(room.castMember)} of room`;
+  return (
+    `the sit says little: ${sitter} and ${them} differ here ${apartWords(difference, { unit, style })}, ` +
+    `more than the ${show(littleSaidMm)} up to which one body is taken for another (shop rule). ` +
+    `By the drawing ${them} ${drawn}; only ${them} can try that.`
+  );
 }
 
 function sideWords({ side }: StandInCheck, them: string, sitter: string): string {
@@ -46,8 +100,7 @@ function correction(
   { difference }: StandInCheck,
   them: string,
   sitter: string,
-  unit: RuleUnit,
-  style: LengthStyle,
+  { unit, style }: Said,
 ): string {
   if (!difference) return '';
   const { best, low, high } = difference;
