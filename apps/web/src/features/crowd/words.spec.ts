@@ -1,7 +1,7 @@
 import { loadRuleBook } from '@settlewright/anthropometry';
 import rules from '@settlewright/seed-data/fit-rules.json';
 import { describe, expect, it } from 'vitest';
-import { ofHundred, rangeWords, rejectionWords, sexWords } from './words.ts';
+import { fineWords, isAbout, ofHundred, rangeWords, rejectionWords, sexWords } from './words.ts';
 
 const ruleBook = loadRuleBook(rules);
 const share = (value: number) => ({ value, low: value, high: value });
@@ -14,6 +14,13 @@ describe('shares in words', () => {
     [0.998, 'more than 99'],
     [1, '100'],
   ])('%d', (value, words) => expect(ofHundred({ value })).toBe(words));
+
+  it.each([
+    [0, false],
+    [0.002, false],
+    [0.344, true],
+    [0.998, false],
+  ])('puts “about” before a number alone: %d', (value, about) => expect(isAbout({ value })).toBe(about));
 
   it('closes a range that rounding closes', () => {
     expect(rangeWords({ low: 0.331, high: 0.334 })).toBe('33');

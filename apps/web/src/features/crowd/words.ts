@@ -9,7 +9,10 @@ export function ofHundred({ value }: Pick<Share, 'value'>): string {
   return String(n);
 }
 
-/** "33 to 35": the range of a share, in people of 100; nothing where rounding closes it. */
+/** "about" before a number; "fewer than 1" says as much by itself. */
+export const isAbout = ({ value }: Pick<Share, 'value'>): boolean => /^[1-9]/.test(ofHundred({ value }));
+
+/** "33 to 35 by counting alone": the range of a share, in people of 100. */
 export function rangeWords({ low, high }: Pick<Share, 'low' | 'high'>): string {
   const [from, to] = [Math.round(low * 100), Math.round(high * 100)];
   return from === to ? `${from}` : `${from} to ${to}`;

@@ -36,8 +36,9 @@ export interface Effects {
   worse: PersonEffect[];
   /** Checks that are still not met, not known or no longer asked. */
   short: PersonEffect[];
-  /** People with a place and every check at least tight, none of them gone; of everybody. */
+  /** Of those to serve: who has a place and every check at least tight, none of them gone; then, and as it is now. */
   served: number;
+  servedNow: number;
   of: number;
   tight: number;
   /** Pieces and ways that turn better or worse. */
@@ -66,6 +67,19 @@ const isShort = ({ outcome }: FitCell): boolean =>
 /** Cells of a row that are not at least tight. */
 export const shortCells = (row: SitterRow): FitCell[] => row.cells.filter(isShort);
 
+const isTight = ({ outcome }: FitCell): boolean => outcome.kind === 'verdict' && outcome.verdict === 'tight';
+
+/** How many are served at every place they have; what is not known serves nobody. */
+function servedIn(
+  { rows }: FitSheet,
+  toServe: ReadonlySet<string>,
+  also: (row: SitterRow) => boolean = () => true,
+): number {
+  const own = (sitterId: string) => rows.filter((row) => row.sitterId === sitterId);
+  const isServed = (row: SitterRow) => isAnswered(row) && shortCells(row).length === 0 && also(row);
+  return [...toServe].filter((id) => own(id).length > 0 && own(id).every(isServed)).length;
+}
+
 /** Somebody without a place keeps a row in which nothing is answered. */
 const isAnswered = (row: SitterRow): boolean => row.cells.some(({ outcome }) => outcome.kind === 'verdict');
 
@@ -77,15 +91,25 @@ interface Ground {
   free: readonly FreeDimension[];
   check: (document: SetDocument) => FitSheet;
   ruleBook: RuleBook;
+  /** Everybody with a body; a place without one is neither better nor worse. */
+  people: ReadonlySet<string>;
+  /** Those of them who are to be served. */
+  toServe: ReadonlySet<string>;
 }
+
+/** A sheet of those alone whose body is known. */
+const ofPeople = (sheet: FitSheet, people: ReadonlySet<string>): FitSheet => ({
+  ...sheet,
+  rows: sheet.rows.filter(({ sitterId }) => people.has(sitterId)),
+});
 
 /** What an answer does to everybody; nothing where a piece cannot be so. */
 export function effectsOf(tried: Pick<Tried, 'values'>, ground: Ground): Effects | undefined {
-  const { document, dimensions, free, check, ruleBook } = ground;
+  const { document, dimensions, free, check, ruleBook, people, toServe } = ground;
   const next = documentAt(ground, tried.values);
   if (!next) return undefined;
-  const sheet = check(next);
-  const before = check(document);
+  const sheet = ofPeople(check(next), people);
+  const before = ofPeople(check(document), people);
   const compared = compareSheets(before, sheet);
   const placed = new Set(sheet.rows.filter(isAnswered).map(({ sitterId }) => sitterId));
   const unplaced = [...new Map([...before.rows, ...sheet.rows].map((row) => [row.sitterId, row])).values()]
@@ -131,11 +155,10 @@ export function effectsOf(tried: Pick<Tried, 'values'>, ground: Ground): Effects
         }),
       ...unplaced,
     ],
-    served: sheet.rows.filter(
-      (row) => isAnswered(row) && shortCells(row).length === 0 && goneOf(row.sitterId).length === 0,
-    ).length,
-    of: placed.size + unplaced.length,
-    tight: sheet.counts.tight,
+    served: servedIn(sheet, toServe, ({ sitterId }) => goneOf(sitterId).length === 0),
+    servedNow: servedIn(before, toServe),
+    of: toServe.size,
+    tight: sheet.rows.flatMap(({ cells }) => cells).filter(isTight).length,
     piecesBetter: compared.pieces.gains.map(piece),
     piecesWorse: compared.pieces.losses.map(piece),
   };

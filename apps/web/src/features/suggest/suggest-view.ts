@@ -11,7 +11,10 @@ export interface SuggestView {
   check: (document: SetDocument) => FitSheet;
   /** Takes a document as one named step; absent when it cannot be changed here. */
   replace?: (document: SetDocument, step: string) => void;
+  /** Everyone whose body is known. */
   sitters: Sitter[];
+  /** Places that name somebody who was removed. */
+  placesWithoutBody: number;
   ruleBook: RuleBook;
   style: LengthStyle;
   colourOf: (sitterId: string) => number;

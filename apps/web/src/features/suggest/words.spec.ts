@@ -5,19 +5,29 @@ import { freeOf, questionOf, startForm, startFreedom } from './search-form.ts';
 import { bay, check, INCHES, ruleBook } from './test/show-suggest.tsx';
 import {
   blameWords,
+  isWorthTaking,
   publicWords,
   servedWords,
   shareWords,
   staysWords,
   stepWords,
   timeLeftWords,
+  triedWords,
 } from './words.ts';
 import { dimensionWords } from '@/lib/dimension-words.ts';
 
 const dimensions = dimensionsOf(bay);
 const free = freeOf(startForm(bay), dimensions, INCHES);
 const now = free.map(({ dimensionId }) => dimensions.find(({ id }) => id === dimensionId)?.value ?? 0);
-const ground = { document: bay, dimensions, free, check, ruleBook };
+const ground = {
+  document: bay,
+  dimensions,
+  free,
+  check,
+  ruleBook,
+  people: new Set(['hetty', 'marcus']),
+  toServe: new Set(['hetty', 'marcus']),
+};
 const lower = effectsOf({ values: now.map((value, n) => (n === 0 ? value - 100 : value)) }, ground);
 if (!lower) throw new Error('The seats cannot be lower.');
 
@@ -65,12 +75,72 @@ describe('words of a choice', () => {
     expect(noBench?.short.find(({ name }) => name === 'Marcus')?.checks).toEqual(['no place']);
   });
 
+  it('counts those alone who are to be served, and nobody without a body', () => {
+    const values = now.map((value, n) => (n === 0 ? value - 100 : value));
+    const alone = effectsOf(
+      { values },
+      { ...ground, people: new Set(['hetty']), toServe: new Set(['hetty']) },
+    );
+    expect(alone?.of).toBe(1);
+    expect([...(alone?.worse ?? []), ...(alone?.short ?? [])].map(({ name }) => name)).not.toContain(
+      'Marcus',
+    );
+    const wanted = effectsOf({ values }, { ...ground, toServe: new Set(['marcus']) });
+    expect([wanted?.served, wanted?.of]).toEqual([0, 1]);
+    expect(wanted?.better.map(({ name }) => name)).toContain('Hetty');
+  });
+
+  it('never counts what is not known as served', () => {
+    const unknown = (document: typeof bay) => {
+      const sheet = check(document);
+      const rows = sheet.rows.map((row) => ({
+        ...row,
+        cells: row.cells.map((cell) =>
+          cell.outcome.kind === 'verdict'
+            ? { ...cell, outcome: { ...cell.outcome, verdict: 'notKnown' as const } }
+            : cell,
+        ),
+      }));
+      return { ...sheet, rows };
+    };
+    expect(effectsOf({ values: now }, { ...ground, check: unknown })).toMatchObject({
+      served: 0,
+      servedNow: 0,
+      of: 2,
+    });
+  });
+
   it.each([
-    [{ served: 2, of: 2 }, 'All 2 sitters are at least tight in every check.'],
-    [{ served: 1, of: 2 }, '1 of 2 sitters is at least tight in every check.'],
-    [{ served: 0, of: 2 }, 'None of 2 sitters is at least tight in every check.'],
-    [{ served: 1, of: 1 }, 'The sitter is at least tight in every check.'],
+    [{ served: 2, servedNow: 1, of: 2 }, 'All 2 sitters to serve are at least tight in every check, now 1.'],
+    [
+      { served: 1, servedNow: 0, of: 2 },
+      '1 of 2 sitters to serve is at least tight in every check, now none.',
+    ],
+    [
+      { served: 0, servedNow: 0, of: 2 },
+      'None of 2 sitters to serve is at least tight in every check, as now.',
+    ],
+    [{ served: 1, servedNow: 0, of: 1 }, 'The sitter to serve is at least tight in every check.'],
+    [{ served: 0, servedNow: 0, of: 1 }, 'The sitter to serve is not at least tight in every check, as now.'],
+    [{ served: 0, servedNow: 0, of: 0 }, 'Nobody named is to be served.'],
   ])('%o', (counts, words) => expect(servedWords(counts)).toBe(words));
+
+  it('offers first only what serves somebody, or more of the public where nobody is named', () => {
+    expect(isWorthTaking({ served: 0, of: 2 }, 0.9, 0.1)).toBe(false);
+    expect(isWorthTaking({ served: 1, of: 2 }, 0.1, 0.9)).toBe(true);
+    expect(isWorthTaking({ served: 0, of: 0 }, 0.3, 0.1)).toBe(true);
+    expect(isWorthTaking({ served: 0, of: 0 }, 0.1, 0.1)).toBe(false);
+    expect(isWorthTaking({ served: 0, of: 0 }, undefined, undefined)).toBe(false);
+  });
+
+  it('says how many choices an answer was chosen from', () => {
+    expect(triedWords('done', { done: 213, of: 213 })).toBe(
+      'Finished: 213 choices tried, and these are the best of them.',
+    );
+    expect(triedWords('stopped', { done: 57, of: 400 })).toMatch(
+      /^Stopped early after 57 choices of at most 400:/,
+    );
+  });
 
   it('says shares as about so many of a hundred', () => {
     expect(shareWords(0.234, 0.002)).toBe('About 23 in 100, now fewer than 1 in 100');
@@ -81,7 +151,7 @@ describe('words of a choice', () => {
     const say = (rules: Partial<Parameters<typeof publicWords>[0]>) =>
       publicWords({ counted: [], unknown: [], metByNobody: [], ...rules }, (id) => id.toLowerCase());
     expect(say({ counted: ['A', 'B'], metByNobody: ['C'] })).toMatch(
-      /^Counted at once: a and b\. Left out, for nobody was found to meet it in these ranges: c\. For every other check/,
+      /^Counted are people who are at least tight in a and b at once, at every place of the set\. Left out, for nobody was found to meet it in these ranges: c\. For every other check/,
     );
     expect(say({ counted: ['A'], unknown: ['D'] })).toMatch(/^No share is given: d cannot be told/);
     expect(say({ counted: ['A'], unknown: ['D'] })).not.toContain('Counted');

@@ -1,6 +1,8 @@
 import type { FitSheet, RuleBook } from '@settlewright/anthropometry';
 import type { Blame, Dimension, LengthStyle, Suggestion } from '@settlewright/geometry';
 import { aboutInHundred, dimensionValue, exactValue, joinWords, markWords } from '@/lib/dimension-words.ts';
+import { footRails } from '@/lib/foot-rails.ts';
+import { countedWords, EVERY_PLACE } from '@/lib/crowd/counted-words.ts';
 import type { SearchTold } from './search.ts';
 import { checkWords, shortCells, type Effects, type Move, type PersonEffect } from './effects.ts';
 import { shortName } from '@/lib/short-name.ts';
@@ -49,15 +51,35 @@ export function stepWords(moves: readonly Move[], style: LengthStyle): string {
 export const personWords = ({ name, checks }: PersonEffect): string =>
   `${shortName(name)}: ${checks.join(', ')}`;
 
-/** How many people an answer serves: "All six are at least tight in every check." */
-export function servedWords({ served, of }: Pick<Effects, 'served' | 'of'>): string {
-  if (of === 0) return 'Nobody is seated.';
-  if (served === of)
-    return of === 1
-      ? 'The sitter is at least tight in every check.'
-      : `All ${of} sitters are at least tight in every check.`;
-  if (served === 0) return `None of ${of} sitters is at least tight in every check.`;
-  return `${served} of ${of} sitters ${served === 1 ? 'is' : 'are'} at least tight in every check.`;
+/** How many of those to serve an answer serves, and how many now: "2 of 4 sitters to serve … every check, now 1." */
+export function servedWords({ served, servedNow, of }: Pick<Effects, 'served' | 'servedNow' | 'of'>): string {
+  if (of === 0) return 'Nobody named is to be served.';
+  const now = servedNow === served ? ', as now' : `, now ${servedNow === 0 ? 'none' : servedNow}`;
+  if (of === 1) {
+    const is = served === 1 ? 'is' : 'is not';
+    return `The sitter to serve ${is} at least tight in every check${servedNow === served ? ', as now' : ''}.`;
+  }
+  if (served === of) return `All ${of} sitters to serve are at least tight in every check${now}.`;
+  if (served === 0) return `None of ${of} sitters to serve is at least tight in every check${now}.`;
+  return `${served} of ${of} sitters to serve ${served === 1 ? 'is' : 'are'} at least tight in every check${now}.`;
+}
+
+/** Whether an answer may be offered first: it serves somebody, or where nobody named is asked about, more of the public. */
+export function isWorthTaking(
+  { served, of }: Pick<Effects, 'served' | 'of'>,
+  share: number | undefined,
+  shareNow: number | undefined,
+): boolean {
+  if (of > 0) return served > 0;
+  return share !== undefined && share > (shareNow ?? 0);
+}
+
+/** What was tried, so that an answer stopped early and a full one can be told apart. */
+export function triedWords(state: 'stopped' | 'done', { done, of }: Pick<Suggestion, 'done' | 'of'>): string {
+  const choices = `${done} ${done === 1 ? 'choice' : 'choices'}`;
+  return state === 'done'
+    ? `Finished: ${choices} tried, and these are the best of them.`
+    : `Stopped early after ${choices} of at most ${of}: these are the best of those tried, and there may be better ones.`;
 }
 
 /** The share of a crowd with an answer, and now. */
@@ -80,7 +102,9 @@ export function publicWords(
           `No share is given: ${named(unknown)} cannot be told of these people, and these dimensions change it.`,
         ]
       : []),
-    ...(counted.length > 0 && unknown.length === 0 ? [`Counted at once: ${named(counted)}.`] : []),
+    ...(counted.length > 0 && unknown.length === 0
+      ? [countedWords({ passes: 'atLeastTight', checks: counted.map(checkOf), places: EVERY_PLACE })]
+      : []),
     ...(metByNobody.length > 0
       ? [`Left out, for nobody was found to meet it in these ranges: ${named(metByNobody)}.`]
       : []),

@@ -3,12 +3,15 @@ import { memo } from 'react';
 import { Disclosure } from '@/components/disclosure.tsx';
 import { LoadingLine } from '@/components/loading.tsx';
 import { Measure } from '@/components/measure.tsx';
+import { countedWords, SHARES_DIFFER } from '@/lib/crowd/counted-words.ts';
 import { aboutInHundred, exactValue } from '@/lib/dimension-words.ts';
 import { useChoices } from '../choices-view.ts';
 import { shareAt, type ShareCurves } from '../use-share-curve.ts';
 
 interface PublicWordsProps {
   curves: ShareCurves | undefined;
+  /** Rules of the solid curve. */
+  ruleIds: ReadonlySet<string>;
   /** The check that turns most away at the present value. */
   rejection: Rejection | undefined;
   present: number;
@@ -23,6 +26,7 @@ const told = (share: number | undefined) => (share === undefined ? 'not known' :
 /** The share of the public in words: by the shown checks, and by every check at once. */
 export const PublicWords = memo(function PublicWords({
   curves,
+  ruleIds,
   rejection,
   present,
   suggested,
@@ -39,7 +43,12 @@ export const PublicWords = memo(function PublicWords({
     );
   }
   const values = suggested === undefined ? [present] : [present, suggested];
-  const { told: from, points, joint } = curves;
+  const { told: from, points, joint, placeIds } = curves;
+  const counted = countedWords({
+    passes: 'fit',
+    checks: [...ruleIds].map((id) => ruleBook.rule(id).columnName.toLowerCase()),
+    places: placeIds.length === 1 ? 'the 1 place that moves' : `all ${placeIds.length} places that move`,
+  });
   return (
     <div className="text-sm">
       <p>
@@ -58,6 +67,9 @@ export const PublicWords = memo(function PublicWords({
           </div>
         ))}
       </dl>
+      <p className="mt-1 max-w-text text-ink-2">
+        {counted} Dashed, every check of a person at the same places. {SHARES_DIFFER}
+      </p>
       <p className="mt-1 max-w-text text-ink-2">
         {rejection && (
           <>

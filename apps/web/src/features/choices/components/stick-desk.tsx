@@ -146,6 +146,7 @@ export function StickDesk({ tried, stick, rule, crowd, asked, onCrowd }: StickDe
             suggestedAnswers={suggestedAnswers}
           />
           <SaveStick drawing={drawing} dimension={dimension} words={below} />
+          ruleIds={ruleIds}
         </div>
       </div>
     </div>

@@ -1,5 +1,5 @@
 import type { ShareOutcome } from '@settlewright/anthropometry';
-import { ofHundred, rangeWords, sexWords } from '../words.ts';
+import { isAbout, ofHundred, rangeWords, sexWords } from '../words.ts';
 
 interface AllAtOnceProps {
   outcome: ShareOutcome;
@@ -25,7 +25,7 @@ export function AllAtOnce({ outcome, checks, of }: AllAtOnceProps) {
   return (
     <div>
       <p className="tracking-hero">
-        {fits.mixed.value > 0 && <span className="text-xl font-light">about </span>}
+        {isAbout(fits.mixed) && <span className="text-xl font-light">about </span>}
         <span className={/^\d/.test(value) ? 'text-4xl font-light' : 'text-2xl font-light'}>{value}</span>
         <span className="text-xl font-light"> in 100 fit {counted}</span>
       </p>

@@ -8,12 +8,13 @@ import { PopulationFields } from '@/components/population-fields.tsx';
 import { announce } from '@/lib/announce.ts';
 import { CROWDS, crowdWords, DEFAULT_CROWD, type CrowdChoice } from '@/lib/crowd/crowds.ts';
 import { useOwnCrowd, useOwnCrowds } from '@/lib/crowd/own-crowds.ts';
+import { countedWords, EVERY_PLACE, SHARES_DIFFER } from '@/lib/crowd/counted-words.ts';
 import { usePageTitle } from '@/lib/page-title.ts';
 import { useWorkshop } from '@/lib/workshop.ts';
 import { useCrowdView } from '../crowd-view.ts';
 import { AddSurvey } from '../survey/add-survey.tsx';
 import { useShares, type Shares } from '../use-shares.ts';
-import { ofHundred, rejectionWords } from '../words.ts';
+import { isAbout, ofHundred, rejectionWords } from '../words.ts';
 import { AllAtOnce } from './all-at-once.tsx';
 import { CheckShares } from './check-shares.tsx';
 import { CountMillion } from './count-million.tsx';
@@ -75,6 +76,7 @@ function Counted() {
   const { ruleBook } = useCrowdView();
   const { canEdit } = useWorkshop();
   const [crowd, choose] = useCrowdAddress();
+  const nameOf = (ruleId: string) => ruleBook.rule(ruleId).columnName.toLowerCase();
   const [unticked, setUnticked] = useState<ReadonlySet<string>>(new Set());
   const own = useOwnCrowds();
   const ownCrowd = useOwnCrowd(crowd.populationId);
@@ -120,6 +122,14 @@ function Counted() {
           <CheckShares
             checks={every.shares.checks}
             ticked={ticked}
+                <p className="mt-2 max-w-text text-sm text-ink-2">
+                  {countedWords({
+                    passes: 'fit',
+                    checks: isPart ? [...ticked].map(nameOf) : all.length,
+                    places: EVERY_PLACE,
+                  })}{' '}
+                  {SHARES_DIFFER}
+                </p>
             onTick={(ids) => setUnticked(new Set(all.filter((id) => !ids.includes(id))))}
           />
           <PlaceShares places={joint.shares.places} />
@@ -135,7 +145,8 @@ function Counted() {
 function useSaid({ shares, isCounting }: { shares?: Shares; isCounting: boolean }): void {
   useEffect(() => {
     if (!isCounting && shares?.all.kind === 'shares') {
-      announce(`About ${ofHundred(shares.all.fits.mixed)} in 100 fit.`);
+      const { mixed } = shares.all.fits;
+      announce(`${isAbout(mixed) ? 'About ' : ''}${ofHundred(mixed)} in 100 fit.`);
     }
   }, [shares, isCounting]);
 }

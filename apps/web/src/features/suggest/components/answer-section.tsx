@@ -5,7 +5,7 @@ import { Measure } from '@/components/measure.tsx';
 import { aboutInHundred } from '@/lib/dimension-words.ts';
 import type { Effects, PersonEffect } from '../effects.ts';
 import { useSuggestView } from '../suggest-view.ts';
-import { moveWords, personWords, servedWords, shareWords, staysWords } from '../words.ts';
+import { isWorthTaking, moveWords, personWords, servedWords, shareWords, staysWords } from '../words.ts';
 
 interface AnswerSectionProps {
   kind: AnswerKind;
@@ -29,10 +29,13 @@ export function AnswerSection({ kind, effects, share, shareNow, onTake }: Answer
   const [open, setOpen] = useState(false);
   const { moves, stays, better, worse, short, piecesBetter, piecesWorse } = effects;
   const shares = shareWords(share, shareNow);
+  const isWorth = isWorthTaking(effects, share, shareNow);
+  const servesNone = effects.of > 0 && effects.served === 0;
   return (
     <section aria-labelledby={id} className="ruled flex min-w-0 flex-col pt-3">
       <h3 id={id} className="text-sm font-medium text-ink-2">
         {TITLES[kind]}
+        {servesNone && ', serves nobody in full'}
       </h3>
       {moves.length === 0 ? (
         <p className="mt-1 text-xl font-light tracking-hero">Everything stays as it is.</p>
@@ -89,8 +92,9 @@ export function AnswerSection({ kind, effects, share, shareNow, onTake }: Answer
       </dl>
       <div className="mt-auto flex flex-wrap items-center gap-3">
         {onTake && moves.length > 0 && (
-          <Button look={kind === 'best' ? 'main' : 'ruled'} onClick={onTake}>
-            Take it<span className="sr-only">, {TITLES[kind].toLowerCase()}</span>
+          <Button look={kind === 'best' && isWorth ? 'main' : 'ruled'} onClick={onTake}>
+            {isWorth ? 'Take it' : 'Take it all the same'}
+            <span className="sr-only">, {TITLES[kind].toLowerCase()}</span>
           </Button>
         )}
         <Button look="word" aria-expanded={open} onClick={() => setOpen(!open)}>

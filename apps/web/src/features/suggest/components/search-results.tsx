@@ -3,6 +3,7 @@ import { useMemo } from 'react';
 import { Notice } from '@/components/notice.tsx';
 import { RuleHeading } from '@/components/rule-heading.tsx';
 import { dimensionValue, sentence } from '@/lib/dimension-words.ts';
+import { SHARES_DIFFER } from '@/lib/crowd/counted-words.ts';
 import { checkWords, effectsOf } from '../effects.ts';
 import type { SearchTold } from '../search.ts';
 import { useSuggestView } from '../suggest-view.ts';
@@ -14,6 +15,8 @@ interface SearchResultsProps {
   told: SearchTold;
   dimensions: readonly Dimension[];
   free: readonly FreeDimension[];
+  /** Ids of everybody the search was to serve. */
+  toServe: ReadonlySet<string>;
   /** "US adults 2015–16, men and women equally". */
   crowdName: string;
   /** True once it has ended or was stopped. */
@@ -23,16 +26,28 @@ interface SearchResultsProps {
 }
 
 /** What the search found: up to three answers, who stands in the way, and keeping the look. */
-export function SearchResults({ told, dimensions, free, crowdName, isOver, onTaken }: SearchResultsProps) {
-  const { document, check, ruleBook, style, replace } = useSuggestView();
+export function SearchResults({
+  told,
+  dimensions,
+  free,
+  toServe,
+  crowdName,
+  isOver,
+  onTaken,
+}: SearchResultsProps) {
+  const { document, check, ruleBook, style, replace, sitters } = useSuggestView();
   const { suggestion, people } = told;
   const { answers, present, blame } = suggestion;
   // The same choices come with every message: only new ones are worked out.
   const key = answers.map(({ tried }) => tried.values.join(' ')).join('|');
   const found = useMemo(
-    () => answers.map(({ tried }) => effectsOf(tried, { document, dimensions, free, check, ruleBook })),
+    () => {
+      const people = new Set(sitters.map(({ id }) => id));
+      const ground = { document, dimensions, free, check, ruleBook, people, toServe };
+      return answers.map(({ tried }) => effectsOf(tried, ground));
+    },
     // eslint-disable-next-line react-hooks/exhaustive-deps
-    [key, document, dimensions, free, check, ruleBook],
+    [key, document, dimensions, free, check, ruleBook, sitters, toServe],
   );
   const [best] = found;
   const said =
@@ -85,7 +100,7 @@ export function SearchResults({ told, dimensions, free, crowdName, isOver, onTak
             The public
           </RuleHeading>
           <p className="text-sm text-ink-2">
-            {publicWords(told, (id) => checkWords(ruleBook, id))}{' '}
+            {publicWords(told, (id) => checkWords(ruleBook, id))} {SHARES_DIFFER}{' '}
             {[crowdName, people.source, ...people.cautions].map(sentence).join(' ')}
           </p>
         </section>

@@ -81,8 +81,8 @@ describe('suggested dimensions', () => {
     const onReplace = vi.fn();
     const { user } = show({ onReplace });
     await user.click(screen.getByRole('button', { name: 'Search' }));
-    const best = await screen.findByRole('region', { name: 'Best found' }, FOUND);
-    expect(within(best).getByText(/sitters (is|are) at least tight in every check/)).toBeVisible();
+    const best = await screen.findByRole('region', { name: /^Best found/ }, FOUND);
+    expect(within(best).getByText(/sitters to serve (is|are) at least tight in every check/)).toBeVisible();
     expect(within(best).getAllByText(/Hetty|Marcus/).length).toBeGreaterThan(0);
     expect(screen.getByText('No choice of these dimensions serves everyone')).toBeVisible();
     await user.click(within(best).getByRole('button', { name: /Take it/ }));
@@ -111,12 +111,20 @@ describe('suggested dimensions', () => {
     isHeld = true;
     const { user } = show();
     await user.click(screen.getByRole('button', { name: 'Search' }));
-    await screen.findByRole('region', { name: 'Best found' }, FOUND);
+    await screen.findByRole('region', { name: /^Best found/ }, FOUND);
+  it('says once that a place has no body behind it', () => {
+    const { unmount } = show({ placesWithoutBody: 2 });
+    expect(screen.getByText(/^2 places have no body behind them/)).toHaveTextContent(/never count as served/);
+    unmount();
+    show();
+    expect(screen.queryByText(/no body behind/)).toBeNull();
+  });
+
     expect(screen.getByRole('progressbar')).toBeVisible();
     expect(screen.queryByRole('button', { name: /Take it/ })).toBeNull();
     await user.click(screen.getByRole('button', { name: /Stop and keep/ }));
     expect(screen.queryByRole('progressbar')).toBeNull();
-    expect(screen.getByText(/Stopped early/)).toBeVisible();
+    expect(screen.getByText(/Stopped early after \d+ choices of at most \d+/)).toBeVisible();
     expect(screen.getAllByRole('button', { name: /Take it/ }).length).toBeGreaterThan(0);
   });
 
@@ -124,13 +132,13 @@ describe('suggested dimensions', () => {
     isHeld = true;
     const { user, unmount } = show();
     await user.click(screen.getByRole('button', { name: 'Search' }));
-    await screen.findByRole('region', { name: 'Best found' }, FOUND);
+    await screen.findByRole('region', { name: /^Best found/ }, FOUND);
     unmount();
     isHeld = false;
     show();
     await waitFor(() => expect(asked).toHaveLength(2));
     expect(asked[1]?.known.length).toBeGreaterThan(10);
-    expect(await screen.findByRole('region', { name: 'Best found' }, FOUND)).toBeVisible();
+    expect(await screen.findByRole('region', { name: /^Best found/ }, FOUND)).toBeVisible();
   });
 
   it('is for those who decide the dimensions', () => {

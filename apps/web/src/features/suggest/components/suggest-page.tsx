@@ -14,6 +14,7 @@ import { readSearch } from '../kept-search.ts';
 import { freeOf, questionOf, startForm } from '../search-form.ts';
 import { useSuggestView } from '../suggest-view.ts';
 import { useSearch } from '../use-search.ts';
+import { triedWords } from '../words.ts';
 import { FreeDimensions } from './free-dimensions.tsx';
 import { SearchProgress } from './search-progress.tsx';
 import { SearchResults } from './search-results.tsx';
@@ -93,6 +94,8 @@ function Searching() {
     // eslint-disable-next-line react-hooks/exhaustive-deps
   }, [ownCrowd.isPending]);
 
+  const searched = run?.asked.sitters;
+  const toServe = useMemo(() => new Set(searched?.map(({ id }) => id)), [searched]);
   const state = run?.state;
   useEffect(() => {
     if (state === 'done' || state === 'stopped') announce('The answers are there.');
@@ -149,8 +152,8 @@ function Searching() {
               : 'The set or what was asked has changed since: these answers are for what it was. Search again.'}
           </Notice>
         )}
-        {run?.state === 'stopped' && !isStale && (
-          <p className="mb-4 text-sm text-ink-2">Stopped early: there may be better choices than these.</p>
+        {(state === 'stopped' || state === 'done') && run?.told && !isStale && (
+          <p className="mb-4 text-sm text-ink-2">{triedWords(state, run.told.suggestion)}</p>
         )}
       </div>
       {run?.told && !isStale && (
@@ -158,6 +161,7 @@ function Searching() {
           told={run.told}
           dimensions={dimensions}
           free={run.asked.free}
+          toServe={toServe}
           isOver={!isRunning}
           crowdName={form.crowd ? crowdWords(form.crowd, [...own, ...CROWDS]) : ''}
           onTaken={setTaken}

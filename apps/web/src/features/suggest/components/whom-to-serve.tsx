@@ -2,6 +2,7 @@ import { PopulationFields } from '@/components/population-fields.tsx';
 import { RuleHeading } from '@/components/rule-heading.tsx';
 import { SitterDot } from '@/components/sitter-dot.tsx';
 import { DEFAULT_CROWD, type CrowdOption } from '@/lib/crowd/crowds.ts';
+import { noBodyWords } from '@/lib/no-body-words.ts';
 import type { SearchForm } from '../search-form.ts';
 import { useSuggestView } from '../suggest-view.ts';
 
@@ -15,7 +16,7 @@ const TICK = 'size-4 shrink-0 accent-(--color-chalk)';
 
 /** Everyone named comes first, then as many as can be of a population. */
 export function WhomToServe({ form, own, onChange }: WhomToServeProps) {
-  const { sitters, colourOf } = useSuggestView();
+  const { sitters, placesWithoutBody, colourOf } = useSuggestView();
   const { leftOut, crowd } = form;
   return (
     <section aria-labelledby="serve-heading">
@@ -44,6 +45,7 @@ export function WhomToServe({ form, own, onChange }: WhomToServeProps) {
             </li>
           ))}
         </ul>
+        {placesWithoutBody > 0 && <p className="mt-1 text-sm text-ink-2">{noBodyWords(placesWithoutBody)}</p>}
       </fieldset>
       <label className="flex min-h-11 items-center gap-3">
         <input

@@ -70,11 +70,12 @@ export function searchAtOnce(asked: SearchAsked): SearchTold {
 
 interface ShownProps {
   canEdit?: boolean;
+  placesWithoutBody?: number;
   onReplace?: (document: SetDocument, step: string) => void;
 }
 
 /** The page over a real set, real people and real rules. */
-export function Shown({ canEdit = true, onReplace }: ShownProps) {
+export function Shown({ canEdit = true, placesWithoutBody = 0, onReplace }: ShownProps) {
   const [document, setDocument] = useState(bay);
   const replace = (next: SetDocument, step: string) => {
     setDocument(next);
@@ -90,6 +91,7 @@ export function Shown({ canEdit = true, onReplace }: ShownProps) {
         check,
         ...(canEdit && { replace }),
         sitters,
+        placesWithoutBody,
         ruleBook,
         style: INCHES,
         colourOf: () => 1,
