@@ -49,4 +49,14 @@ describe('a name in a text', () => {
     expect(parts('A Person', 'A Person')).toEqual([]);
     expect(parts('王芳', '王')).toEqual([]);
   });
+
+  it('never offers a common short word of a name as that name', () => {
+    const parts = (name: string, text: string) =>
+      new PersonName(name).partMentions(text).map((mention) => mention.name);
+    const text = 'The top of the table for THE van, and der Tisch des Bruno';
+    expect(parts('Bruno the Van der Meer', text)).toEqual(['Bruno']);
+    expect(parts('Van der The', text)).toEqual([]);
+    // A word that only begins so is a name.
+    expect(parts('Theo Vance', 'ask Theo, then Vance')).toEqual(['Theo', 'Vance']);
+  });
 });

@@ -3,6 +3,13 @@ export const ERASED_NAME = 'a person erased';
 
 /** Parts of a name shorter than this say too little to look for. */
 const LEAST_LETTERS = 3;
+/** Articles, prepositions and forms of address that stand in names and in every other sentence. */
+const COMMON_WORDS = new Set(
+  (
+    'and the for with from von vom van der den dem des die das ten ter zum zur del della delle dei degli dos les los ' +
+    'las une und een bin ibn bint sir mrs miss lady lord prof jnr snr senior junior'
+  ).split(' '),
+);
 
 const NO_LETTER_BEFORE = '(?<![\\p{L}\\p{M}\\p{N}])';
 const NO_LETTER_AFTER = '(?![\\p{L}\\p{M}\\p{N}])';
@@ -18,6 +25,9 @@ export interface Mention {
   after: string;
 }
 
+const lettersOf = (part: string): number => (part.match(/\p{L}/gu) ?? []).length;
+const isCommon = (part: string): boolean => COMMON_WORDS.has(part.toLowerCase());
+
 /** One name looked for in texts: as whole words, in capitals or not, however it is spaced. */
 export class PersonName {
   private readonly whole: RegExp;
@@ -30,7 +40,7 @@ export class PersonName {
       'giu',
     );
     const telling = words.flatMap((word) => word.match(/[\p{L}\p{M}'\u2019]+/gu) ?? []);
-    const long = telling.filter((part) => (part.match(/\p{L}/gu) ?? []).length >= LEAST_LETTERS);
+    const long = telling.filter((part) => lettersOf(part) >= LEAST_LETTERS && !isCommon(part));
     this.parts = long.length
       ? new RegExp(`${NO_LETTER_BEFORE}(?:${long.map(literal).join('|')})${NO_LETTER_AFTER}`, 'giu')
       : null;

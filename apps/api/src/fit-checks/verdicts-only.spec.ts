@@ -6,8 +6,8 @@ import { verdictsOnly } from './verdicts-only';
 const { ruleBook } = new FitCheckService();
 const ruleWith = (unit: string) => ruleBook.rules.find((rule) => rule.unit === unit)!.id;
 
-function shown(outcome: Partial<VerdictOutcome>, unit = 'mm') {
-  const cell = { ruleId: ruleWith(unit), outcome: { kind: 'verdict', estimated: false, ...outcome } };
+function shown(outcome: Partial<VerdictOutcome>, unit = 'mm', ruleId = ruleWith(unit)) {
+  const cell = { ruleId, outcome: { kind: 'verdict', estimated: false, ...outcome } };
   const sheet: FitSheet = {
     rows: [],
     publicRow: { cells: [] },
@@ -24,33 +24,47 @@ function shown(outcome: Partial<VerdictOutcome>, unit = 'mm') {
 
 describe('margins for who sees no measures', () => {
   it.each([
-    [12.4, 10],
-    [12.6, 15],
-    [1.2, 0],
+    [24, 0],
+    [25.4, 25.4],
+    [50.7, 25.4],
     [0, 0],
-  ])('round %d mm that are left to %d', (margin, seen) => {
-    expect(shown({ verdict: 'fits', margin }).margin).toBe(seen);
+    [76.3, 76.2],
+    [400, 76.2],
+  ])('give %d mm that are left as at least %d', (margin, seen) => {
+    expect(shown({ verdict: 'fits', margin }).margin).toBeCloseTo(seen, 9);
   });
 
   it.each([
-    [-0.4, -5],
-    [-2.4, -5],
-    [-7.6, -10],
-    [-12.4, -10],
-  ])('round %d mm that are missing to %d, never to none', (margin, seen) => {
-    expect(shown({ verdict: 'wontFit', margin }).margin).toBe(seen);
+    [-0.4, -25.4],
+    [-25.4, -25.4],
+    [-26, -50.8],
+    [-200, -203.2],
+  ])('give %d mm that are missing as at most %d, never as none', (margin, seen) => {
+    expect(shown({ verdict: 'wontFit', margin }).margin).toBeCloseTo(seen, 9);
   });
 
   it('show nothing missing where a hair below the line still counts as inside', () => {
     expect(shown({ verdict: 'tight', margin: -0.06 }).margin).toBe(0);
   });
 
-  it('round both ends of a range', () => {
+  it('round both ends of a range outwards, and give none where room is only at least so much', () => {
     const marginRange = { low: -1.3, high: 33.3 };
-    expect(shown({ verdict: 'notKnown', margin: 16, marginRange })).toMatchObject({
-      margin: 15,
-      marginRange: { low: -5, high: 35 },
-    });
+    const seen = shown({ verdict: 'notKnown', margin: 16, marginRange });
+    expect(seen.margin).toBe(0);
+    expect(seen.marginRange?.low).toBeCloseTo(-25.4, 9);
+    expect(seen.marginRange?.high).toBeCloseTo(50.8, 9);
+    expect(shown({ verdict: 'fits', margin: 200, marginRange: { low: 150, high: 250 } })).not.toHaveProperty(
+      'marginRange',
+    );
+  });
+
+  it('leave what reads nobody’s body as it is', () => {
+    expect(shown({ verdict: 'tight', margin: 12.34 }, 'mm', 'SEAT-06').margin).toBe(12.34);
+  });
+
+  it('tell two people whose measures lie within an inch by nothing', () => {
+    const seen = [31, 36, 42, 49].map((margin) => shown({ verdict: 'fits', margin }).margin);
+    expect(new Set(seen).size).toBe(1);
   });
 
   it('leave degrees alone', () => {

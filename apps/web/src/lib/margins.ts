@@ -8,6 +8,17 @@ const WIDE_RANGE_MM = 0.75 * INCH;
 /** Stands where a number was: it went with the person it told of. */
 export const REMOVED = 'removed';
 
+/** Stands where a number is short of a line by less than is shown; equality is within a tenth of a millimetre. */
+export const JUST_SHORT = 'just short';
+const EQUAL = 0.1;
+
+/** Short of the line by so little that the number would read as none. */
+export function isJustShort(margin: number, unit: RuleUnit, style: LengthStyle): boolean {
+  return (
+    unit === 'mm' && margin < -EQUAL - 1e-9 && amountText(-margin, unit, style) === amountText(0, unit, style)
+  );
+}
+
 /** A number of a check in its own unit. */
 export function amountText(value: number, unit: RuleUnit, style: LengthStyle): string {
   if (unit === 'deg') return formatAngle(value);
@@ -48,7 +59,9 @@ export function marginText(
 ): { margin: string; range: string | undefined } {
   if (outcome.margin === null) return { margin: REMOVED, range: undefined };
   const { margin, half } = knownMargin(outcome.margin, outcome.marginRange ?? null, unit, style);
-  const text = signed(amountText(margin, unit, style), margin);
+  if (half === undefined && isJustShort(margin, unit, style)) return { margin: JUST_SHORT, range: undefined };
+  const shown = amountText(margin, unit, style);
+  const text = shown === amountText(0, unit, style) ? `+${shown}` : signed(shown, margin);
   if (half === undefined) return { margin: text, range: undefined };
   const halfText = formatLength(half, style).replace(/[\s\u202f]*(mm|″)$/, '');
   return { margin: text, range: halfText === '0' ? undefined : `± ${halfText}` };

@@ -13,8 +13,11 @@ describe('margins in words', () => {
     expect(marginWords({ margin: 6 }, 'deg', inches)).toBe('+6°');
   });
 
-  it('puts no sign before nothing', () => {
-    expect(marginWords({ margin: -0.4 }, 'mm', inches)).toBe('0″');
+  it('puts no sign before nothing, and never says nothing where something is missing', () => {
+    expect(marginWords({ margin: 0.4 }, 'mm', inches)).toBe('0″');
+    expect(marginWords({ margin: -0.06 }, 'mm', inches)).toBe('0″');
+    expect(marginWords({ margin: -0.4 }, 'mm', inches)).toBe('just short');
+    expect(marginWords({ margin: -0.4 }, 'mm', metric)).toBe('just short');
   });
 
   it('says half the range once, without its unit', () => {

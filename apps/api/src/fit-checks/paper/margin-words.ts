@@ -4,6 +4,8 @@ import type { RuleUnit } from '@settlewright/anthropometry';
 
 /** From this half range on, a predicted margin is said in coarse steps. */
 const COARSE_FROM_MM = 19.05;
+/** A hair more than the tolerance within which a value is on its line. */
+const EQUAL_MM = 0.1 + 1e-9;
 const COARSE_STEP_MM = { millimetres: 10, 'feet-inches': 12.7, 'decimal-inches': 12.7 } as const;
 
 /** The margin before it says the unit already. */
@@ -20,7 +22,9 @@ export function marginWords({ margin, marginRange }: Margin, unit: RuleUnit, sty
   const half = marginRange ? (marginRange.high - marginRange.low) / 2 : 0;
   const spread = half > 0 ? ` ± ${amount(half, half, unit, style).replace(UNIT_SIGN, '')}` : '';
   const words = amount(Math.abs(margin), half, unit, style);
-  return (words === amount(0, half, unit, style) ? '' : margin < 0 ? '−' : '+') + words + spread;
+  const isNone = words === amount(0, half, unit, style);
+  if (isNone && half === 0 && unit === 'mm' && margin < -EQUAL_MM) return 'just short';
+  return (isNone ? '' : margin < 0 ? '−' : '+') + words + spread;
 }
 
 /** A value or limit of a rule. */

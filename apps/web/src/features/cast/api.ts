@@ -62,8 +62,18 @@ export const useSaveCastMember = (place: CastPlace) =>
       : api.patch<CastMember>(`${path(place)}/${id}`, input),
   );
 
-export const useErase = (place: CastPlace) =>
-  useChange(place, (id: string) => api.delete(`${path(place)}/${id}`));
+/** Reads everything of the production again but what was asked of the person, who is gone. */
+export function useErase(place: CastPlace) {
+  const client = useQueryClient();
+  return useMutation({
+    mutationFn: (id: string) => api.delete(`${path(place)}/${id}`),
+    onSuccess: (_, id) =>
+      client.invalidateQueries({
+        queryKey: productionKey(place.workshopId, place.productionId),
+        predicate: ({ queryKey }) => !queryKey.includes(id),
+      }),
+  });
+}
 
 /** Which measures of whom settle most; slow for a large cast, so nothing waits for it. */
 export const useMeasureNext = (place: CastPlace, enabled: boolean) =>

@@ -1,7 +1,7 @@
 import type { FitSheet, RuleBook, VerdictOutcome } from '@settlewright/anthropometry';
 import type { LengthStyle } from '@settlewright/geometry';
 import { verdictWord } from '@/components/verdict.tsx';
-import { amountText, marginText } from '@/lib/margins.ts';
+import { amountText, isJustShort, JUST_SHORT, marginText } from '@/lib/margins.ts';
 
 /** The worst verdict of one sitter over the rules that are shown. */
 export interface Answer {
@@ -30,9 +30,11 @@ export function answerAt(
 export const marginOf = ({ ruleId, outcome }: Answer, ruleBook: RuleBook, style: LengthStyle) =>
   marginText(outcome, ruleBook.rule(ruleId).unit, style);
 
-/** "⅞″ short". */
+/** "⅞″ short", "just short". */
 export function shortBy({ ruleId, outcome }: Answer, ruleBook: RuleBook, style: LengthStyle): string {
-  return `${amountText(Math.max(0, -outcome.margin), ruleBook.rule(ruleId).unit, style)} short`;
+  const { unit } = ruleBook.rule(ruleId);
+  if (isJustShort(outcome.margin, unit, style)) return JUST_SHORT;
+  return `${amountText(Math.max(0, -outcome.margin), unit, style)} short`;
 }
 
 /** "+1½″ ± 1, tight, est." for lists and tables. */

@@ -23,6 +23,20 @@ describe('margins', () => {
     expect(marginText({ margin: 4 }, 'deg', INCHES).margin).toBe('+4°');
   });
 
+  it('never say that nothing is missing where something is', () => {
+    expect(marginText({ margin: -0.4 }, 'mm', INCHES)).toEqual({ margin: 'just short', range: undefined });
+    expect(marginText({ margin: -0.4 }, 'mm', MM).margin).toBe('just short');
+    expect(marginText({ margin: -0.6 }, 'mm', MM).margin).toBe('−1\u202fmm');
+    // Within a tenth of a millimetre it is on the line, and the verdict is the better one.
+    expect(marginText({ margin: -0.06 }, 'mm', INCHES).margin).toBe('+0″');
+    const said = outcomeWords(
+      { ...outcomes[0]!, verdict: 'wontFit', margin: -0.4, estimated: false },
+      'mm',
+      INCHES,
+    );
+    expect(said).toBe('won’t fit, just short');
+  });
+
   it('are as fine as they are known: half inches from ¾″ each way on', () => {
     expect(marginText(around(1.3 * INCH, 0.7 * INCH), 'mm', INCHES)).toEqual({
       margin: '+1¼″',

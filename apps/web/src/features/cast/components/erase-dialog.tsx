@@ -22,12 +22,13 @@ export function EraseDialog({ place, person, onClose }: EraseDialogProps) {
       describe={
         <>
           <p>
-            Name, measures and notes go for good, from drafts, issued revisions, fit sheets and stored papers
-            too, and the name from what people typed.
+            Name, measures and notes go for good, from cast, drafts, issued revisions, fit sheets and stored
+            papers too, and the name from what people typed. Where they sat stands “removed sitter”.
           </p>
           <p className="mt-2">
-            Where they sat stands “removed sitter”; the verdicts stay. This cannot be undone. Export them
-            first if they ask for what is held.
+            Issued fit sheets keep their verdicts, without the numbers behind them. A draft has no body at the
+            place any more: its checks there become not known, until somebody else is seated. This cannot be
+            undone. Export them first if they ask for what is held.
           </p>
         </>
       }

@@ -185,12 +185,18 @@ describe('PeoplePage', () => {
       alreadySent,
       copies: 1,
     });
+    let namedAfter = 0;
     async function open(answer: () => Response) {
       signInAs('owner');
       const erased: unknown[] = [];
+      namedAfter = 0;
       server.use(
-        http.get(castPath, () => HttpResponse.json(page([HETTY]))),
-        http.get(`${castPath}/:castId/named`, answer),
+        http.get(castPath, () => HttpResponse.json(page(erased.length > 0 ? [] : [HETTY]))),
+        http.get(`${castPath}/:castId/named`, () => {
+          if (erased.length === 0) return answer();
+          namedAfter += 1;
+          return HttpResponse.json({}, { status: 404 });
+        }),
         http.delete(`${castPath}/:castId`, ({ params }) => {
           erased.push(params.castId);
           return new HttpResponse(null, { status: 204 });
@@ -221,6 +227,20 @@ describe('PeoplePage', () => {
       expect(erased).toEqual([]);
       await userEvent.click(within(dialog).getByRole('button', { name: 'Erase' }));
       await waitFor(() => expect(erased).toEqual([HETTY.id]));
+    });
+
+    it('says what becomes of verdicts, and asks nothing about somebody who is gone', async () => {
+      const { dialog, erased } = await open(() =>
+        HttpResponse.json({ places: [], placeCount: 0, parts: [], partCount: 0 }),
+      );
+      expect(within(dialog).getByText(/Issued fit sheets keep their verdicts/)).toHaveTextContent(
+        /A draft has no body at the place any more: its checks there become not known/,
+      );
+      await within(dialog).findByText(/Nobody typed the whole name/);
+      await userEvent.click(within(dialog).getByRole('button', { name: 'Erase' }));
+      expect(await screen.findByText('Nobody yet')).toBeVisible();
+      expect(erased).toEqual([HETTY.id]);
+      expect(namedAfter).toBe(0);
     });
 
     it('may still be done when the places cannot be listed', async () => {

@@ -5,10 +5,13 @@ import { useFitView } from '../fit-view.ts';
 
 /** What the signs on the sheet mean; stands on every page that shows it. */
 export function FitKey() {
+  const { detail } = useFitView();
   return (
     <p className="text-sm text-ink-2">
       <strong className="font-semibold text-ink">+</strong> room left to the fail line,{' '}
       <strong className="font-semibold text-ink">−</strong> short of it.{' '}
+      {detail === 'verdicts' &&
+        'Bodies are personal, so margins of sitters are rough here: at least so much is left, at most so much is short. '}
       <span className="font-medium text-ink">est.</span> predicted or told, with the range that holds 90 in
       100. Cushions pressed by each sitter, shoes on, backs against the rest.
     </p>

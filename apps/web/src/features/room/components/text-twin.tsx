@@ -21,9 +21,9 @@ export function TextTwin({ id, picture, tapes, onOpenCell }: Props) {
         {document.pieces.length === 0
           ? 'The set is empty.'
           : `Shows ${document.pieces.map((piece) => `${piece.mark} ${piece.name}`).join(', ')}.`}{' '}
-        {sayPlaces(document, bodies, style)} Arrow keys move the selected piece, comma and full stop turn it,
-        Delete removes it; with Shift a press adds to what is chosen, and Ctrl A chooses all. Sizes are listed
-        below.
+        {sayPlaces(document, bodies, style, detail)} Arrow keys move the selected piece, comma and full stop
+        turn it, Delete removes it; with Shift a press adds to what is chosen, and Ctrl A chooses all. Sizes
+        are listed below.
       </p>
       {tapes.length > 0 && (
         <ul aria-label="Tapes of the drawing">
