@@ -4,7 +4,7 @@ import type { Repository } from 'typeorm';
 import type { MemberInfo } from '../common/access.decorator';
 import { PopulationsService } from '../populations/populations.service';
 import type { PopulationUseDto } from './dto/population-use.dto';
-import { Study, UNFINISHED } from './entities/study.entity';
+import { Study } from './entities/study.entity';
 
 /** Which studies drew from a workshop's own population; they outlive it. */
 @Injectable()
@@ -25,10 +25,9 @@ export class PopulationUses {
       .addSelect('set.id', 'setId')
       .addSelect('set.name', 'setName')
       .addSelect('count(*)::int', 'studies')
-      .addSelect('(count(*) FILTER (WHERE study.state = ANY(:unfinished)))::int', 'unfinished')
+      .addSelect('(count(*) FILTER (WHERE study.endedAt IS NULL))::int', 'unfinished')
       .where('production.workshopId = :workshopId', { workshopId: member.workshopId })
       .andWhere(`study.population ->> 'id' = :populationId`, { populationId })
-      .setParameter('unfinished', [...UNFINISHED])
       .groupBy('production.id')
       .addGroupBy('set.id')
       .orderBy('production.name')
