@@ -3,11 +3,10 @@ import { LIMB_COLUMNS, type Cage } from './cage.ts';
 import type { Figure } from './figure.ts';
 import {
   armLinks,
+  bicepsTuck,
   direction,
   leanPoint,
   mirror,
-  restElbow,
-  restShoulder,
   shoulderLineMm,
   type ArmStance,
   type Stance,
@@ -66,13 +65,12 @@ function armPoints(f: Figure, arm: ArmStance, trunkRad: number, armhole: Vec3[])
     mixPoints(outside, inside, 0.5),
     scale(sub(outside, inside), 0.5),
     scale(hangFront, 58 * k),
-  ).map((p, c) => turned(p, 0.68 + 0.18 * Math.cos((c * Math.PI) / 4)));
+  ).map((p, c) => turned(p, 0.64 + 0.22 * Math.cos((c * Math.PI) / 4)));
 
   const r = radius.arm;
   const e = radius.elbow;
   const links = armLinks(f);
-  const restOut = mix(restShoulder(f)[0], restElbow(f)[0], 0.52) + 0.96 * r;
-  const tuck = Math.max(0, restOut - (f.BD / 2 + 0.11 * (f.FF - f.BD)));
+  const tuck = bicepsTuck(f);
   const bend = clamp(Math.acos(clamp(dot(u, g), -1, 1)) / (Math.PI / 2), 0, 1);
   const front = frontOf(u, lateral);
   const onUpper = (t: number): Vec3 => along(shoulder, u, t * links.upperMm);

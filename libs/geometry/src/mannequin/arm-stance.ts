@@ -1,77 +1,15 @@
 import type { Vec3 } from '../parts/part.ts';
 import type { Figure } from './figure.ts';
 import { reachFor, type Reach } from './limb-reach.ts';
-import { thighTop } from './leg-sections.ts';
-import { armLinks, HIP_FORWARD_MM, leanPoint, restKnee, restShoulder, type ArmStance } from './stance.ts';
-import { along, clamp, cross, length, mix, sub, unit } from './vector.ts';
-
-/** Something level the forearms can lie on, in the body frame. */
-export interface Rest {
-  /** Height of its top over the pressed seat. */
-  topMm: number;
-  /** Its near edge, forward of the rearmost buttock. */
-  edgeMm: number;
-}
+import { obstacles, overlap, type Rest } from './arm-clearance.ts';
+import { thighSurface } from './leg-sections.ts';
+import { armLinks, leanPoint, restKnee, restShoulder, type ArmStance } from './stance.ts';
+import { bellyFront } from './trunk-profile.ts';
+import { along, cross, length, mix, sub, unit } from './vector.ts';
 
 const POLE: Vec3 = [0.15, -0.8, -0.6];
 const SWIVEL_STEP_RAD = 0.1;
 const MOST_SWIVELS = 14;
-
-/** What an arm must keep clear of, worked out once for a body. */
-interface Obstacles {
-  /** Front of the trunk at a height, forward of the rearmost buttock. */
-  trunkFront: (y: number) => number;
-  /** How far the lean carries the line of the back at a height. */
-  leaned: (y: number) => number;
-  halfWaistMm: number;
-  radius: (t: number) => number;
-  elbowMm: number;
-  rest: Rest | undefined;
-}
-
-function obstacles(f: Figure, trunkRad: number, rest: Rest | undefined): Obstacles {
-  const belly = 30 + 0.02 * f.CD + f.AD;
-  const crease = mix(HIP_FORWARD_MM + 0.42 * (belly - HIP_FORWARD_MM), belly, 0.62);
-  const chest = 0.755 * f.AH;
-  const bellyHeight = mix(f.TC, chest, 0.22);
-  const foot = leanPoint([0, 0, 0], trunkRad)[2];
-  const slope = leanPoint([0, 1, 0], trunkRad)[2] - foot;
-  return {
-    trunkFront: (y) =>
-      y < bellyHeight
-        ? mix(crease, belly, clamp((y - f.TC) / (bellyHeight - f.TC), 0, 1))
-        : mix(belly, 12 + f.CD, clamp((y - bellyHeight) / (chest - bellyHeight), 0, 1)),
-    leaned: (y) => foot + slope * y,
-    halfWaistMm: 0.45 * f.WB,
-    radius: (t) => mix(t === 0 ? f.radius.elbow : f.radius.forearm, f.radius.wrist, t),
-    elbowMm: f.radius.elbow,
-    rest,
-  };
-}
-
-const SAMPLES = [0, 0.15, 0.3, 0.45, 0.6, 0.75, 0.9];
-
-/**
- * How much an arm runs into things: 0 when elbow and forearm stay outside the trunk, before the back and
- * above the edge they lie on.
- */
-function overlap(elbow: Vec3, wrist: Vec3, among: Obstacles): number {
-  const { rest } = among;
-  let most = Math.max(0, among.leaned(elbow[1]) - (elbow[2] - 0.9 * among.elbowMm)) / 60;
-  for (const t of SAMPLES) {
-    const y = mix(elbow[1], wrist[1], t);
-    const radius = among.radius(t) * 0.8;
-    const deepness = (among.trunkFront(y) - 20) / 2;
-    const across = mix(elbow[0], wrist[0], t) / (among.halfWaistMm + radius);
-    const deep = (mix(elbow[2], wrist[2], t) - deepness - 20 - 0.7 * among.leaned(y)) / (deepness + radius);
-    most = Math.max(most, 1 - across * across - deep * deep);
-  }
-  if (rest && elbow[2] < rest.edgeMm && wrist[2] > rest.edgeMm) {
-    const t = (rest.edgeMm - elbow[2]) / (wrist[2] - elbow[2]);
-    most = Math.max(most, (rest.topMm - mix(elbow[1], wrist[1], t) + 0.95 * among.radius(t)) / 60);
-  }
-  return most;
-}
 
 /** A place for the wrist and how much it is wanted less than the best one. */
 interface Wish {
@@ -83,7 +21,7 @@ interface Wish {
 function bestReach(f: Figure, trunkRad: number, wishes: Wish[], rest?: Rest): Reach {
   const shoulder = leanPoint(restShoulder(f), trunkRad);
   const { upperMm, forearmMm } = armLinks(f);
-  const among = obstacles(f, trunkRad, rest);
+  const among = obstacles(f, trunkRad, shoulder, rest);
   let best: { reach: Reach; cost: number } | undefined;
   for (const { wrist, dislike } of wishes) {
     const straightness = length(sub(wrist, shoulder)) / (upperMm + forearmMm);
@@ -92,7 +30,7 @@ function bestReach(f: Figure, trunkRad: number, wishes: Wish[], rest?: Rest): Re
       const least = atLeast + step * SWIVEL_STEP_RAD;
       if (best && least >= best.cost) break;
       const reach = reachFor(shoulder, wrist, upperMm, forearmMm, POLE, step * SWIVEL_STEP_RAD);
-      const cost = least + 8 * overlap(reach.middle, reach.end, among);
+      const cost = least + overlap(reach.middle, reach.end, among);
       if (!best || cost < best.cost) best = { reach, cost };
     }
   }
@@ -114,23 +52,26 @@ function armAt(f: Figure, trunkRad: number, reach: Reach, hand: Vec3, handBack: 
 const steps = (from: number, to: number, step: number): number[] =>
   Array.from({ length: Math.max(1, Math.floor((to - from) / step) + 1) }, (_, i) => from + i * step);
 
-/** Hands on the thighs. */
+/** Hands on the thighs, apart from each other, in front of the belly. */
 export function armOnLap(f: Figure, trunkRad: number): ArmStance {
   const kneeX = restKnee(f)[0];
-  const height = (x: number, z: number): number => thighTop(f, x, z) + 0.9 * f.radius.wrist + 4;
-  const near = 0.62 * (30 + f.AD);
-  const wishes = [1.05, 1.3, 1.55].flatMap((out, i) =>
-    steps(near, f.BKL - 0.85 * f.Ha, 18).map((z): Wish => ({
-      wrist: [out * kneeX, height(out * kneeX, z), z],
-      dislike: 0.25 * i,
-    })),
+  const thighTop = thighSurface(f);
+  const height = (x: number, z: number): number => thighTop(x, z) + 0.9 * f.radius.wrist + 4;
+  const near = 0.62 * bellyFront(f);
+  const inmost = Math.max(1.05 * kneeX, 0.5 * f.Ha + 12);
+  const wishes = [1, 1.15, 1.3, 1.45].flatMap((out, i) =>
+    steps(near, f.BKL - 0.85 * f.Ha, 18).map((z): Wish => {
+      const x = out * inmost;
+      return { wrist: [x, height(x, z), z], dislike: 0.2 * i };
+    }),
   );
   const reach = bestReach(f, trunkRad, wishes);
   const wrist = reach.end;
-  const aside = wrist[0] - 0.28 * f.Ha;
+  const inwards = Math.min(0.28, (wrist[0] - 0.5 * f.Ha - 4) / f.Ha + 0.1) * f.Ha;
+  const aside = wrist[0] - inwards;
   const middle = height(mix(wrist[0], aside, 0.5), wrist[2] + 0.5 * f.Ha) - wrist[1];
   const tip = height(aside, wrist[2] + f.Ha) - wrist[1];
-  return armAt(f, trunkRad, reach, [-0.28 * f.Ha, Math.max(tip - 8, 2 * middle - 8), f.Ha], [0.12, 1, 0.1]);
+  return armAt(f, trunkRad, reach, [-inwards, Math.max(tip - 8, 2 * middle - 8), f.Ha], [0.12, 1, 0.1]);
 }
 
 /**
@@ -142,10 +83,14 @@ export function armOnTable(f: Figure, trunkRad: number, rest: Rest, up: Vec3): A
   const shoulder = leanPoint(restShoulder(f), trunkRad);
   if (rest.topMm > shoulder[1] - 120 || rest.topMm < 0.5 * f.TC) return undefined;
   const { upperMm, forearmMm } = armLinks(f);
-  const x = 0.32 * f.BA;
-  const withinReach = steps(Math.max(rest.edgeMm + 25, 0.7 * f.AD), rest.edgeMm + 0.8 * forearmMm, 12)
-    .map((z): Wish => ({ wrist: [x, rest.topMm + 0.86 * f.radius.wrist + 2, z], dislike: 0 }))
-    .filter(({ wrist }) => length(sub(wrist, shoulder)) < 0.985 * (upperMm + forearmMm));
+  const withinReach = [0.34, 0.44, 0.54].flatMap((out, i) =>
+    steps(Math.max(rest.edgeMm + 25, 0.7 * f.AD), rest.edgeMm + 0.8 * forearmMm, 12)
+      .map((z): Wish => ({
+        wrist: [out * f.BA, rest.topMm + 0.86 * f.radius.wrist + 2, z],
+        dislike: 0.12 * i,
+      }))
+      .filter(({ wrist }) => length(sub(wrist, shoulder)) < 0.985 * (upperMm + forearmMm)),
+  );
   if (withinReach.length === 0) return undefined;
   const reach = bestReach(f, trunkRad, withinReach, rest);
   return armAt(f, trunkRad, reach, along(along([0, 0, 1], [1, 0, 0], -0.4), up, -0.06), up);

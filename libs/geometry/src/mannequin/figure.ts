@@ -36,6 +36,8 @@ export interface Figure {
   MH: number;
   FHL: number;
   Ha: number;
+  /** Where the rearmost buttock is drawn, forward of the back; 0 unless the skin bulges there. */
+  rump: number;
   /** 0 for a man's build, 1 for a woman's; between when the figure lies between. */
   woman: number;
   /** Stature over the mean of the sex. */
@@ -106,6 +108,7 @@ export function readFigure(means: FigureMeans): Figure {
     BPL: need(means, 'buttock_popliteal_length'),
     BKL: need(means, 'buttock_knee_length'),
     TC: need(means, 'thigh_clearance'),
+    rump: 0,
     HB,
     BD,
     AD,

@@ -50,19 +50,16 @@ function thighRings(f: Figure): [ThighRing, ThighRing, ThighRing] {
   ];
 }
 
-/**
- * Height of a thigh's upper side over the seat.
- *
- * @param x - from the sitter's midline
- * @param z - forward of the rearmost buttock
- */
-export function thighTop(f: Figure, x: number, z: number): number {
+/** Height of a thigh's upper side over the seat, at `x` from the midline and `z` forward of the rearmost buttock. */
+export function thighSurface(f: Figure): (x: number, z: number) => number {
   const [first, second, third] = thighRings(f);
-  const [from, to] = z < second.z ? [first, second] : [second, third];
-  const t = clamp((z - from.z) / (to.z - from.z), 0, 1);
-  const top = mix(from.top, to.top, t);
-  const aside = clamp(Math.abs(x - mix(from.centreX, to.centreX, t)) / mix(from.half, to.half, t), 0, 0.95);
-  return (top / 2) * (1 + (1 - aside ** 2.2) ** (1 / 2.2));
+  return (x, z) => {
+    const [from, to] = z < second.z ? [first, second] : [second, third];
+    const t = clamp((z - from.z) / (to.z - from.z), 0, 1);
+    const top = mix(from.top, to.top, t);
+    const aside = clamp(Math.abs(x - mix(from.centreX, to.centreX, t)) / mix(from.half, to.half, t), 0, 0.95);
+    return (top / 2) * (1 + (1 - aside ** 2.2) ** (1 / 2.2));
+  };
 }
 
 /** Sections of the left leg as measured: thigh along the seat, shin upright. Rings 1 to 12, then the toe. */

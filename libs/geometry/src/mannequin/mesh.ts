@@ -1,10 +1,13 @@
 import { turnToRoom } from './body-placement.ts';
 import type { Cage } from './cage.ts';
+import type { FigureMeans } from './figure.ts';
+import { giveWay } from './give-way.ts';
 import type { MannequinPose } from './pose.ts';
 import { press } from './press.ts';
 import type { MannequinTag } from './segments.ts';
 import { fitCage, skin, skinPoints } from './skin.ts';
 import { solvedFigure } from './solve.ts';
+import { measuringStance } from './stance.ts';
 import { faceTriangles, gridsOf, outwardFlips } from './triangles.ts';
 
 const SIZE = 4;
@@ -161,13 +164,14 @@ function skinNormals(points: Float64Array, triangles: Uint32Array): Float64Array
  * @returns one merged mesh in the room frame, millimetres, with unit normals
  * @source E. Catmull, J. Clark 1978 for the surface; sections by eye over ANSUR II measures
  */
-export function mannequinMesh(pose: MannequinPose): MannequinMesh {
+export function mannequinMesh(pose: Pick<MannequinPose, 'means' | 'stance' | 'placement'>): MannequinMesh {
   const { fine } = skin();
   shared ??= buildTemplate();
   const { source, indices, triangles, tags, groups, seams } = shared;
   const { drawn } = solvedFigure(pose.means);
   const points = skinPoints(fine, fitCage(drawn, pose.stance));
   press(points, fine, drawn, pose.stance);
+  giveWay(points, fine, drawn, pose.stance);
   const normals = skinNormals(points, triangles);
 
   const [ax, ay, az] = [
@@ -189,4 +193,17 @@ export function mannequinMesh(pose: MannequinPose): MannequinMesh {
     }
   }
   return { positions: outPositions, normals: outNormals, indices, tags, groups, seams };
+}
+
+/**
+ * Skin of a body in the posture in which its measures are defined: upright on the plane y = 0 with the rearmost buttock
+ * at z = 0, facing +z, shins upright, upper arms hanging, forearms level, without shoes.
+ *
+ * @param means - body measures in millimetres, weight in kilograms
+ * @returns the near mesh; throws a RangeError naming the measure when one is missing
+ * @source posture of ISO 7250-1
+ */
+export function measuringMesh(means: FigureMeans): MannequinMesh {
+  const placement = { originMm: [0, 0, 0] as const, facingRad: 0, tiltRad: 0 };
+  return mannequinMesh({ means, stance: measuringStance(solvedFigure(means).drawn), placement });
 }

@@ -17,6 +17,9 @@ import { writeTrunk } from './trunk-sections.ts';
 /** What a point of the skin rests against. */
 export const TOUCH = { none: 0, seat: 1, sole: 2, midline: 4 } as const;
 
+/** What of the body gives way to an arm lying on it. */
+export const SOFT = { none: 0, trunk: 1, thigh: 2 } as const;
+
 /** A level of the skin ready for use: its limit points as mixtures of cage points. */
 export interface SkinLevel {
   level: Level;
@@ -25,6 +28,8 @@ export interface SkinLevel {
   touch: Uint8Array;
   /** For every point: +1 for the sitter's left leg, -1 for the right, 0 elsewhere. */
   legSide: Int8Array;
+  /** What of `SOFT` every point is. */
+  soft: Uint8Array;
 }
 
 /** Everything that is the same for every body. */
@@ -43,9 +48,15 @@ const touchOfFace = (face: CageFace): number => {
   return TOUCH.none;
 };
 
+const softnessOf = ({ region, part, strip }: CageFace): number => {
+  if (region === 'trunk' && part === 'trunk' && strip <= 4) return SOFT.trunk;
+  return region === 'leg' && strip <= 2 ? SOFT.thigh : SOFT.none;
+};
+
 function skinLevel(cage: Cage, level: Level, rows: SparseRows): SkinLevel {
   const touch = new Uint8Array(level.pointCount);
   const legSide = new Int8Array(level.pointCount);
+  const soft = new Uint8Array(level.pointCount);
   const leftLeg = new Set(cage.legs[0].slice(1).flat().concat(cage.toes[0]));
   const rightLeg = new Set(cage.legs[1].slice(1).flat().concat(cage.toes[1]));
   level.quads.forEach((quad, q) => {
@@ -57,10 +68,15 @@ function skinLevel(cage: Cage, level: Level, rows: SparseRows): SkinLevel {
         : 0;
     for (const v of quad) {
       touch[v]! |= touchOfFace(face);
+      soft[v] = Math.max(soft[v]!, softnessOf(face));
       if (side !== 0) legSide[v] = side;
     }
   });
-  return { level, limit: toLimit(level, rows, cage.pointCount), touch, legSide };
+  // The armhole belongs to the arm as well: it stays where the sections put it.
+  level.quads.forEach((quad, q) => {
+    if (cage.faces[level.home[q]!.face]!.part === 'arm') for (const v of quad) soft[v] = SOFT.none;
+  });
+  return { level, limit: toLimit(level, rows, cage.pointCount), touch, legSide, soft };
 }
 
 function buildSkin(): Skin {

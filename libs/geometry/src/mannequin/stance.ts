@@ -1,6 +1,6 @@
 import type { Vec3 } from '../parts/part.ts';
 import type { Figure } from './figure.ts';
-import { along, clamp, length, sub, turnAboutX, unit } from './vector.ts';
+import { along, clamp, length, mix, sub, turnAboutX, unit } from './vector.ts';
 
 /**
  * One arm in the body's own frame, always written as if it were the sitter's left one; the right arm
@@ -60,6 +60,12 @@ export function armLinks(f: Figure): { upperMm: number; forearmMm: number } {
     upperMm: length(sub(restElbow(f), restShoulder(f))),
     forearmMm: Math.max(120, f.FHL - f.Ha - f.radius.elbow),
   };
+}
+
+/** How far the biceps is drawn inwards so that the arm stays within the breadth of the shoulders. */
+export function bicepsTuck(f: Figure): number {
+  const restOut = mix(restShoulder(f)[0], restElbow(f)[0], 0.52) + 0.96 * f.radius.arm;
+  return Math.max(0, restOut - (f.BD / 2 + 0.11 * (f.FF - f.BD)));
 }
 
 /** Centre of the knee with the thigh along the seat. */

@@ -3,9 +3,9 @@ import type { Level } from './subdivision.ts';
 
 /** Strips so straight that every second row can be left out. */
 const STRAIGHT: Record<CageFace['part'], readonly number[]> = {
-  trunk: [2, 3, 4, 8, 12],
-  arm: [1, 2, 5],
-  leg: [1, 7, 10],
+  trunk: [8, 12],
+  arm: [1, 2, 5, 6],
+  leg: [7, 9, 10, 11],
   cap: [],
 };
 

@@ -75,9 +75,9 @@ function uprightHalf(f: Figure): { rings: Vec3[][]; crown: [Vec3, Vec3, Vec3] } 
     [0.44 * h, TC + 16, L - 6],
     [0.84 * h, 0.94 * TC, mix(L, 150, 0.5)],
     [0.965 * h, 128, 130],
-    [0.8 * h, 98, 40],
-    [0.45 * h, 88, 0],
-    [0, 94, 14],
+    [0.8 * h, 98, 40 + f.rump],
+    [0.45 * h, 88, f.rump],
+    [0, 94, 14 + f.rump],
   ];
   const levels: Ring[] = [
     level(Y(0.22), mix(WB / 2, h, mix(0.3, 0.36, w)), A, 25),
@@ -115,10 +115,10 @@ function uprightHalf(f: Figure): { rings: Vec3[][]; crown: [Vec3, Vec3, Vec3] } 
       side: face(0.74),
       back: face(0.92),
       halfWidth: 0.465 * HBr,
-      zFront: F - 2,
+      zFront: F + 1,
       zBack: B + 0.04 * HL,
     },
-    { front: EH, side: EH + 2, back: EH + 6, halfWidth: 0.49 * HBr, zFront: F - 5, zBack: B },
+    { front: EH, side: EH + 2, back: EH + 6, halfWidth: 0.49 * HBr, zFront: F - 6, zBack: B },
     { front: skull(0.3), side: skull(0.36), back: skull(0.4), halfWidth: 0.5 * HBr, zFront: F, zBack: B },
     {
       front: skull(0.76),

@@ -1,0 +1,74 @@
+import type { Vec3 } from '../parts/part.ts';
+import type { Figure } from './figure.ts';
+import { thighSurface } from './leg-sections.ts';
+import { HIP_FORWARD_MM, HIP_HEIGHT_MM } from './stance.ts';
+import { trunkGap, trunkLevels, type TrunkLevel } from './trunk-profile.ts';
+import { mix, mixPoints, turnAboutX } from './vector.ts';
+
+/** Something level the forearms can lie on, in the body frame. */
+export interface Rest {
+  /** Height of its top over the pressed seat. */
+  topMm: number;
+  /** Its near edge, forward of the rearmost buttock. */
+  edgeMm: number;
+}
+
+/** What an arm must keep clear of, worked out once for a body. */
+export interface Obstacles {
+  figure: Figure;
+  levels: readonly TrunkLevel[];
+  thighTop: (x: number, z: number) => number;
+  trunkRad: number;
+  shoulder: Vec3;
+  rest: Rest | undefined;
+}
+
+export const obstacles = (
+  figure: Figure,
+  trunkRad: number,
+  shoulder: Vec3,
+  rest: Rest | undefined,
+): Obstacles => ({
+  figure,
+  levels: trunkLevels(figure),
+  thighTop: thighSurface(figure),
+  trunkRad,
+  shoulder,
+  rest,
+});
+
+const HIP_AXIS: Vec3 = [0, HIP_HEIGHT_MM, HIP_FORWARD_MM];
+const UPPER_SAMPLES = [0.5, 0.65, 0.8];
+const FOREARM_SAMPLES = [0, 0.15, 0.3, 0.45, 0.6, 0.75, 0.9, 1];
+/** A limb this much into something counts as much as one radian of swivel. */
+const BAD_MM = 12;
+const AIR_MM = 3;
+
+/**
+ * How much an arm runs into trunk, back, thighs or the edge it lies on: the deepest place, in shares of 12 mm; 0 when
+ * it is clear.
+ */
+export function overlap(elbow: Vec3, wrist: Vec3, among: Obstacles): number {
+  const { figure, levels, thighTop, trunkRad, shoulder, rest } = among;
+  const { radius } = figure;
+  let most = 0;
+  const look = (p: Vec3, r: number): void => {
+    const upright = trunkRad === 0 ? p : turnAboutX(p, HIP_AXIS, -trunkRad);
+    most = Math.max(most, r + AIR_MM - trunkGap(levels, upright), 0.9 * r - upright[2]);
+  };
+  for (const t of UPPER_SAMPLES) look(mixPoints(shoulder, elbow, t), mix(radius.arm, radius.elbow, t) * 0.97);
+  for (const t of FOREARM_SAMPLES) {
+    const p = mixPoints(elbow, wrist, t);
+    const r = mix(t === 0 ? radius.elbow : radius.forearm, radius.wrist, t);
+    look(p, r);
+    if (!rest) most = Math.max(most, thighTop(p[0], p[2]) + 0.9 * r - p[1]);
+  }
+  if (rest && elbow[2] < rest.edgeMm && wrist[2] > rest.edgeMm) {
+    const t = (rest.edgeMm - elbow[2]) / (wrist[2] - elbow[2]);
+    most = Math.max(
+      most,
+      rest.topMm - mix(elbow[1], wrist[1], t) + 0.95 * mix(radius.forearm, radius.wrist, t),
+    );
+  }
+  return most / BAD_MM;
+}
