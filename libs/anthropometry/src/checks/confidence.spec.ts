@@ -2,7 +2,8 @@ import { describe, expect, it } from 'vitest';
 import { check, person, place, set, sitter } from '../../test/example-set.ts';
 import { fitRules, ruleBook } from '../../test/seed.ts';
 import { confidenceWords } from './confidence.ts';
-import { CONFIDENCE_LIMITS, loadRuleBook } from './rule-book.ts';
+import { CONFIDENCE_LIMITS } from './confidence-limits.ts';
+import { loadRuleBook } from './rule-book.ts';
 
 describe('the probability a verdict asks for', () => {
   it('is said with its default, the mark of that and since when', () => {

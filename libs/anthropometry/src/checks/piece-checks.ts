@@ -1,13 +1,5 @@
-import {
-  backAngle,
-  heelSpace,
-  lumbarHeight,
-  pelvisRoom,
-  placeWidth,
-  seatTilt,
-  shoulderRoom,
-  slidePast,
-} from './bench-checks.ts';
+import { backAngle, heelSpace, lumbarHeight, pelvisRoom, seatTilt, slidePast } from './bench-checks.ts';
+import { placeWidth, shoulderRoom } from './bench-length-checks.ts';
 import {
   accessibleBenchBack,
   accessibleBenchEnd,

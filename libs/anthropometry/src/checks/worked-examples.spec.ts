@@ -19,11 +19,11 @@ import { outsideCheck } from '../../test/outside-check.ts';
 import { model, ruleBook } from '../../test/seed.ts';
 import type { MeasureKey } from '../measures/measures.ts';
 import type { Clothing } from '../people/person.ts';
-import { codeLoad, groupNeedMm } from './bench-checks.ts';
+import { codeLoad, groupNeedMm } from './bench-length-checks.ts';
 import { kneeDepthNeededMm } from './clause-checks.ts';
 import type { FitCell, VerdictOutcome } from './fit-sheet.ts';
 import type { Rule } from './rule-book.ts';
-import { fullLegStretchMm } from './table-checks.ts';
+import { fullLegStretchMm } from './table-depth-checks.ts';
 
 /** The hand-worked examples round to a tenth, some to whole millimetres. */
 const ROUNDED = 0.6;
