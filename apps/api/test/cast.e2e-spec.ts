@@ -44,7 +44,7 @@ describe('cast', () => {
             .send({ name: `S ${n}` })
         ).body.colour,
       );
-    expect(colours).toEqual([2, 3, 4, 5, 6, 1]);
+    expect(colours).toEqual([2, 3, 4, 5, 6, 7]);
     const list = await owner().get(`${cast}?sort=createdAt`).expect(200);
     expect(list.body.items[0]).toEqual(body);
     expect(list.body.total).toBe(7);
@@ -88,7 +88,7 @@ describe('cast', () => {
     [{ name: 'A', shoeMm: -0.1 }, 'shoeMm'],
     [{ name: 'A', bodyData: 'giants' }, 'bodyData'],
     [{ name: 'A', clothing: 'armour' }, 'clothing'],
-    [{ name: 'A', colour: 7 }, 'colour'],
+    [{ name: 'A', colour: 13 }, 'colour'],
     [{ name: 'A', measured: 'tall' }, 'measured'],
     [{ name: 'A', measured: { nose_length: { mm: 50 } } }, 'measured.nose_length'],
     [{ name: 'A', measured: { popliteal_height: 394 } }, 'measured.popliteal_height'],

@@ -1,6 +1,7 @@
 export * from './units/result.ts';
 export * from './units/length-style.ts';
 export * from './units/parse-length.ts';
+export { parseStature } from './units/parse-stature.ts';
 export * from './units/format-length.ts';
 export * from './units/spoken-length.ts';
 export * from './units/angle.ts';
@@ -42,6 +43,7 @@ export {
 } from './mannequin/pose.ts';
 export type { MannequinSegment, MannequinTag } from './mannequin/segments.ts';
 export * from './drawing/drawing.ts';
+export { leastWornColour, SITTER_COLOURS, type SitterColour } from './drawing/sitter-colours.ts';
 export { planOf, type PlanOptions } from './drawing/plan.ts';
 export { frontOf } from './drawing/front.ts';
 export { askedShapes } from './drawing/asked.ts';
@@ -53,6 +55,7 @@ export * from './cushions/cushion-settings.ts';
 export { biasStripLength, cutCushion, weltStrips, zipPanel } from './cushions/cushion-sizes.ts';
 export type { CushionCut, CushionSize } from './cushions/cushion-sizes.ts';
 export type * from './cushions/cushion-spec.ts';
+export { curveWords } from './cushions/curve-words.ts';
 export { deriveCushions } from './cushions/derive-cushions.ts';
 export { groupCushions } from './cushions/group-cushions.ts';
 export type { TapeLine } from './tapes/tape-line.ts';

@@ -31,6 +31,7 @@ export const anyBench: fc.Arbitrary<PieceOf<'bench'>> = fc
     ends: fc.record({ left: end, right: end }),
     boards: fc.record({ faceMm: mm(60, 300), revealMm: mm(0, 12) }),
     longestCushionMm: mm(400, 3000),
+    lumbar: fc.option(fc.record({ apexMm: mm(0, 400), recessMm: mm(0, 150) }), { nil: undefined }),
   })
   .map(({ seatPad, backPad, longestCushionMm, at: where, ...sizes }) => {
     const start = newPiece('bench', 'b1', 'B1', where);

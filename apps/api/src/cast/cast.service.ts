@@ -1,3 +1,4 @@
+import { leastWornColour } from '@settlewright/geometry';
 import { Injectable } from '@nestjs/common';
 import { InjectRepository } from '@nestjs/typeorm';
 import { type EntityManager, In, IsNull, Not, type Repository } from 'typeorm';
@@ -9,7 +10,6 @@ import { Problem } from '../common/problem';
 import { readPage } from '../common/read-page';
 import type { Production } from '../productions/entities/production.entity';
 import { ProductionsService } from '../productions/productions.service';
-import { nextColour } from './colours';
 import { readCastCsv, type ReadCsv } from './csv/read-cast-csv';
 import type { CreateCastMemberDto, PatchCastMemberDto } from './dto/save-cast-member.dto';
 import { CastMember, type TapeMeasures } from './entities/cast-member.entity';
@@ -69,7 +69,7 @@ export class CastService {
           shoeMm: dto.shoeMm ?? SHOE_MM,
           clothing: dto.clothing ?? 'light',
           notes: dto.notes ?? '',
-          colour: dto.colour ?? nextColour(worn),
+          colour: dto.colour ?? leastWornColour(worn),
           removedAt: null,
           removedNumber: null,
         }),
@@ -126,7 +126,7 @@ export class CastService {
       const worn = await wornColours(manager, productionId);
       const people = read.rows.flatMap(({ value }) => {
         if (!value) return [];
-        const colour = nextColour(worn);
+        const colour = leastWornColour(worn);
         worn.push(colour);
         const { statureMm = null, weightKg = null, age = null, shoeMm = SHOE_MM } = value;
         return [

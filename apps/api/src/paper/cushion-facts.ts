@@ -1,4 +1,4 @@
-import { formatLength, lengthStep } from '@settlewright/geometry';
+import { curveWords, formatLength, lengthStep } from '@settlewright/geometry';
 import { drawButtonTable } from './button-table';
 import { paragraph } from './paragraph';
 import { drawFacts, type Fact } from './ruled-table';
@@ -6,7 +6,6 @@ import { leading, type Sheet } from './sheet';
 import type { SpecCushion, SpecPack } from './spec-pack';
 import {
   bareLength,
-  curveWords,
   foamWords,
   handWords,
   marksWords,

@@ -49,18 +49,6 @@ export function foamWords({ foamGrade }: Pick<SpecCushion, 'foamGrade'>, units: 
   return [name, density, firmness].filter(Boolean).join(', ');
 }
 
-/** "fullest 7″ over the pressed seat; gives way 1″ for the pelvis below it", as far as either is asked. */
-export function curveWords(
-  { apexMm, recessMm }: NonNullable<SpecCushion['curve']>,
-  units: LengthStyle,
-): string {
-  const show = (mm: number) => formatLength(mm, { ...units, feet: false });
-  const apex = apexMm > 0 ? [`fullest ${show(apexMm)} over the pressed seat`] : [];
-  const recess =
-    recessMm > 0 ? [`gives way ${show(recessMm)} for the pelvis${apexMm > 0 ? ' below it' : ''}`] : [];
-  return [...apex, ...recess].join('; ');
-}
-
 export function volumeWords(m3: number, units: LengthStyle): string {
   return isMetric(units) ? `${m3.toFixed(3)}\u00a0m³` : `${(m3 / M3_PER_FT3).toFixed(2)}\u00a0ft³`;
 }

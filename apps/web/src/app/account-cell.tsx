@@ -1,6 +1,7 @@
 import { useState } from 'react';
 import { useParams } from 'react-router-dom';
 import { Menu, type MenuEntry } from '@/components/menu.tsx';
+import { initials } from '@/lib/short-name.ts';
 import { useRole, useSession } from '@/lib/session.ts';
 import { chooseTheme, type ThemeChoice, useTheme } from '@/lib/theme.ts';
 import { SignOutDialog } from './sign-out-dialog.tsx';
@@ -11,14 +12,6 @@ const THEMES: readonly { choice: ThemeChoice; words: string }[] = [
   { choice: 'dark', words: 'Dark sheet' },
   { choice: 'system', words: 'Sheet as the system' },
 ];
-
-const initials = (name: string) =>
-  name
-    .split(/\s+/)
-    .map((part) => part[0] ?? '')
-    .slice(0, 2)
-    .join('')
-    .toUpperCase();
 
 /** Who is signed in and as what; the theme and the way out. */
 export function AccountCell() {

@@ -17,6 +17,12 @@ const FILLS: Record<Fill, string> = {
   'sitter-4': 'var(--color-sitter-4)',
   'sitter-5': 'var(--color-sitter-5)',
   'sitter-6': 'var(--color-sitter-6)',
+  'sitter-7': 'var(--color-sitter-7)',
+  'sitter-8': 'var(--color-sitter-8)',
+  'sitter-9': 'var(--color-sitter-9)',
+  'sitter-10': 'var(--color-sitter-10)',
+  'sitter-11': 'var(--color-sitter-11)',
+  'sitter-12': 'var(--color-sitter-12)',
   paper: 'var(--color-sheet)',
   none: 'none',
 };

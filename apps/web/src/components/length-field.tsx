@@ -1,4 +1,10 @@
-import { formatLength, lengthStep, type LengthStyle, parseLength } from '@settlewright/geometry';
+import {
+  formatLength,
+  lengthStep,
+  type LengthStyle,
+  parseLength,
+  parseStature,
+} from '@settlewright/geometry';
 import type { Ref } from 'react';
 import { useFormat } from '@/lib/format.ts';
 import type { FieldWords } from './field-frame.tsx';
@@ -17,18 +23,22 @@ interface LengthFieldProps extends FieldWords {
   minMm: number;
   maxMm: number;
   feet?: boolean;
+  /** The height of a person: "180" is one in centimetres, whatever the display unit. */
+  stature?: boolean;
   placeholder?: string;
   name?: string;
   ref?: Ref<HTMLInputElement>;
 }
 
 /** A length in feet, inches, fractions or millimetres, read back in both units. */
-export function LengthField({ minMm, maxMm, feet, ...field }: LengthFieldProps) {
+export function LengthField({ minMm, maxMm, feet, stature, ...field }: LengthFieldProps) {
   const format = useFormat();
   const other = format.style.system === 'millimetres' ? { ...INCHES, feet } : MILLIMETRES;
 
   const read = (text: string): Reading => {
-    const reading = parseLength(text, format.bareUnit, { negative: minMm < 0 });
+    const reading = stature
+      ? parseStature(text, format.bareUnit, { minMm, maxMm })
+      : parseLength(text, format.bareUnit, { negative: minMm < 0 });
     if (!reading.ok) {
       const offers = reading.error.readings
         ?.filter((mm) => mm >= minMm && mm <= maxMm)

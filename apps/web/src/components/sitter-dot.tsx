@@ -1,6 +1,9 @@
-/** A shoulder-shaped dot in the sitter's colour; the name always stands beside it. */
+import { SITTER_COLOURS } from '@settlewright/geometry';
+import { sitterColour, sitterFill } from '@/lib/sitter-colours.ts';
+
+/** A shoulder-shaped dot in the sitter's colour, the later half barred; the name always stands beside it. */
 export function SitterDot({ colour, size = 13 }: { colour: number; size?: number }) {
-  const index = ((Math.max(1, Math.round(colour)) - 1) % 6) + 1;
+  const barred = sitterColour(colour) > SITTER_COLOURS.length / 2;
   return (
     <svg
       viewBox="0 0 14 14"
@@ -12,10 +15,11 @@ export function SitterDot({ colour, size = 13 }: { colour: number; size?: number
     >
       <path
         d="M1 12.2V7a6 6 0 0 1 12 0v5.2a.8.8 0 0 1-.8.8H1.8a.8.8 0 0 1-.8-.8Z"
-        fill={`var(--color-sitter-${index})`}
+        fill={sitterFill(colour)}
         stroke="var(--color-pen)"
         strokeWidth="1.25"
       />
+      {barred && <path d="M1 9.2h12" stroke="var(--color-pen)" strokeWidth="1.25" />}
     </svg>
   );
 }

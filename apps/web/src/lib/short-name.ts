@@ -7,3 +7,12 @@ export function shortName(name: string): string {
   if (mannequin !== undefined) return mannequin;
   return NOT_A_FIRST_NAME.test(name) ? name : (name.split(' ')[0] ?? name);
 }
+
+/** "HV" for Hetty Vance, "W5" for the woman at the 5th. */
+export const initials = (name: string): string =>
+  name
+    .split(/\s+/)
+    .map((part) => part[0] ?? '')
+    .slice(0, 2)
+    .join('')
+    .toUpperCase();

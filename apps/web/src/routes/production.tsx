@@ -7,8 +7,6 @@ import type { ColourOf } from '@/features/productions/components/sets.tsx';
 import { useProduction } from '@/lib/production.ts';
 import { useWorkshop } from '@/lib/workshop.ts';
 
-const COLOURS = [1, 2, 3, 4, 5, 6] as const;
-
 /** Sets, people and orders come from features that do not know each other; here they meet. */
 export function Component() {
   const workshop = useWorkshop();
@@ -16,10 +14,7 @@ export function Component() {
   const cast = useCast({ workshopId: workshop.id, productionId: production.id });
   const people = cast.data?.items;
   const colourOf = useCallback<ColourOf>(
-    (castId) => {
-      const person = people?.find((candidate) => candidate.id === castId);
-      return COLOURS.find((colour) => colour === person?.colour);
-    },
+    (castId) => people?.find((candidate) => candidate.id === castId)?.colour,
     [people],
   );
   return (

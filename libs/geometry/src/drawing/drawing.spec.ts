@@ -121,6 +121,20 @@ describe('section', () => {
     expect(-curve.at(-1)![1]).toBeCloseTo(layout.pressedTopMm + 220, 6);
   });
 
+  it('cuts the pad along the curve that it draws', () => {
+    const lumbar = { apexMm: 220, recessMm: 30 };
+    const pieces = document.pieces.map((p) => (p.id === bench.id ? { ...bench, lumbar } : p));
+    const { shapes } = sectionOf({ ...document, pieces }, bench.id);
+    const [line] = shapes.filter((s) => s.kind === 'polyline' && s.pieceId === bench.id);
+    const curve = line && 'points' in line ? line.points : [];
+    const pads = shapes.flatMap((s) => (s.kind === 'polygon' && s.fill === 'cloth' ? [s.points] : []));
+    const onCurve = pads.find((points) => points.length > 8) ?? [];
+    expect(curve.length).toBeGreaterThan(8);
+    for (const [x, y] of curve.slice(1, -1)) {
+      expect(onCurve.some(([px, py]) => Math.hypot(px - x, py - y) < 0.01)).toBe(true);
+    }
+  });
+
   it('measures what the bench says', () => {
     const layout = benchLayout(bench);
     const values = new Map(dimensions(drawing).map((d) => [d.label, d.valueMm]));

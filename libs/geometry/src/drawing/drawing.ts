@@ -1,4 +1,5 @@
 import type { MaterialKey } from '../parts/part.ts';
+import type { SitterColour } from './sitter-colours.ts';
 
 /** A point on the page in millimetres of the real thing: x to the right, y **down**. */
 export type PagePoint = readonly [number, number];
@@ -6,8 +7,8 @@ export type PagePoint = readonly [number, number];
 /** How strongly a line is drawn; the consumer gives each a width. */
 export type Pen = 'hair' | 'fine' | 'edge' | 'outline' | 'cut';
 
-/** What fills a closed shape: a material, one of six sitter colours, the paper itself or nothing. */
-export type Fill = MaterialKey | `sitter-${1 | 2 | 3 | 4 | 5 | 6}` | 'paper' | 'none';
+/** What fills a closed shape: a material, the colour of a sitter, the paper itself or nothing. */
+export type Fill = MaterialKey | `sitter-${SitterColour}` | 'paper' | 'none';
 
 /** What a shape belongs to, for selection and for leaving things out. */
 interface Owned {

@@ -5,11 +5,12 @@ import { placeFramesOf } from '../pieces/place-frames.ts';
 import type { Piece, PieceOf, SetDocument } from '../room/document.ts';
 import { footprint } from '../room/footprint.ts';
 import { drawingOf, type Drawing, type DrawShape, type Fill, type PagePoint, type Pen } from './drawing.ts';
+import type { SitterColour } from './sitter-colours.ts';
 
 /** What a plan shows besides the pieces. */
 export interface PlanOptions {
-  /** Who sits: a circle at each place, in one of six colours. */
-  sitters?: readonly { placeId: string; colour: 1 | 2 | 3 | 4 | 5 | 6 }[];
+  /** Who sits: a circle at each place, in their colour. */
+  sitters?: readonly { placeId: string; colour: SitterColour }[];
   /** Words on the plan: marks of pieces, marks of seat cushions, or none. */
   marks?: 'none' | 'pieces' | 'cushions';
   marginMm?: number;

@@ -80,13 +80,17 @@ export function cutOutline(part: Part, plane: CutPlane): PagePoint[] | undefined
   const side = corners.map(([x, , z]) => (x - ox) * plane.alongZ - (z - oz) * plane.alongX);
   const page = ([x, y, z]: Vec3): PagePoint => [(x - ox) * plane.alongX + (z - oz) * plane.alongZ, -y];
   const points: PagePoint[] = [];
-  for (const [a, b] of edges) {
+  const crossed = edges.filter(([a, b]) => side[a]! > 0 !== side[b]! > 0);
+  for (const [a, b] of crossed) {
     const [sa, sb] = [side[a]!, side[b]!];
-    if (sa > 0 === sb > 0) continue;
     const t = sa / (sa - sb);
     const [p, q] = [corners[a]!, corners[b]!];
     points.push(page([p[0] + (q[0] - p[0]) * t, p[1] + (q[1] - p[1]) * t, p[2] + (q[2] - p[2]) * t]));
   }
-  const outline = convexOutline(points);
+  // Cut straight across, a prism shows its own outline, which may be hollow; the edges along it come in its order.
+  const half = corners.length / 2;
+  const across =
+    part.solid.shape === 'prism' && crossed.length === half && crossed.every(([a, b]) => b === a + half);
+  const outline = across ? points : convexOutline(points);
   return outline.length >= 3 ? outline : undefined;
 }

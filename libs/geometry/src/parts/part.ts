@@ -35,7 +35,8 @@ export type MaterialKey = 'oak' | 'walnut' | 'cloth' | 'wall' | 'glass' | 'ply';
 /**
  * A solid in its own frame, centred on the origin.
  * `box` is width x height x depth along x, y, z. `cylinder` stands along y.
- * `prism` is a counter-clockwise outline in x-y, extruded along z, centred in z only.
+ * `prism` is a counter-clockwise outline in x-y, extruded along z, centred in z only; where it is hollow (the face of a
+ * curved back), tests for room take its convex hull.
  */
 export type Solid =
   | { shape: 'box'; sizeMm: Vec3 }

@@ -5,6 +5,7 @@ import type { Part } from '../parts/part.ts';
 import { positionsAlong } from '../parts/spacing.ts';
 import type { PieceOf } from '../room/document.ts';
 import { benchBaseParts } from './bench-base.ts';
+import { curvedPad } from './back-curve.ts';
 import { benchLayout, PANEL_MM, type BenchLayout } from './bench-layout.ts';
 
 const POST_MM = 30;
@@ -110,6 +111,20 @@ function cushions(list: PartList, bench: PieceOf<'bench'>, layout: BenchLayout):
     const width = rightMm - leftMm;
     const x = (leftMm + rightMm) / 2;
     if (kind === 'back') {
+      const foot: [number, number] = [
+        layout.faceZMm - start * sinLean,
+        layout.seatTopRearMm + start * cosLean,
+      ];
+      const outlineMm = curvedPad(bench, [
+        [foot[0] - pad * cosLean, foot[1] - pad * sinLean],
+        foot,
+        [foot[0] - rise * sinLean, foot[1] + rise * cosLean],
+        [foot[0] - rise * sinLean - pad * cosLean, foot[1] + rise * cosLean - pad * sinLean],
+      ]);
+      if (outlineMm) {
+        list.crossPanel('back-cushion', 'cloth', { xMm: x, thicknessMm: width, outlineMm });
+        continue;
+      }
       list.box('back-cushion', 'cloth', {
         sizeMm: [width, rise, pad],
         centreMm: [

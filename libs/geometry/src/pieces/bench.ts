@@ -63,6 +63,21 @@ function envelope(bench: PieceOf<'bench'>): Envelope {
   return { minMm: [-bench.lengthMm / 2, 0, 0], maxMm: [bench.lengthMm / 2, top, front] };
 }
 
+type Runs = Parameters<typeof sentenceOf>;
+
+/** What a curved back says of itself, as far as either size is asked. */
+function curveRuns(bench: PieceOf<'bench'>): Runs {
+  const { apexMm, recessMm } = bench.lumbar ?? { apexMm: 0, recessMm: 0 };
+  if (bench.backHeightMm === 0 || (apexMm === 0 && recessMm === 0)) return [];
+  const apex: Runs =
+    apexMm > 0 ? ['fullest ', ['lumbar.apexMm', 'Back curve'], ' over the pressed seat'] : [];
+  const recess: Runs =
+    recessMm > 0
+      ? ['giving way ', ['lumbar.recessMm', 'Pelvis room'], ` for the pelvis${apexMm > 0 ? ' below it' : ''}`]
+      : [];
+  return ['back ', ...apex, ...(apexMm > 0 && recessMm > 0 ? [' and '] : []), ...recess, ', '];
+}
+
 function sentence(bench: PieceOf<'bench'>): SpecSentence {
   const back =
     bench.backHeightMm > 0
@@ -107,6 +122,7 @@ function sentence(bench: PieceOf<'bench'>): SpecSentence {
       'seat tilted ',
       ['seatTiltDeg', 'Seat tilt'],
       ' front up, ',
+      ...curveRuns(bench),
       ...places,
       ...(bench.base === 'box'
         ? ([', heels go ', ['kick.depthMm', 'Kick depth'], ' back under the riser.'] as const)

@@ -109,6 +109,47 @@ describe('a bench', () => {
   });
 });
 
+describe('a curved back', () => {
+  const flat = newPiece('bench', 'b1', 'B1', HERE);
+  const padOf = (bench: PieceOf<'bench'>) =>
+    derivePieceParts(bench).filter(({ role }) => role === 'back-cushion');
+  /** How far the face of the pad stands behind the face of a flat back, at a height over the pressed seat. */
+  const behindFace = (bench: PieceOf<'bench'>, overMm: number): number => {
+    const [pad] = padOf(bench);
+    if (pad?.solid.shape !== 'prism') throw new Error('the pad is flat');
+    const height = benchLayout(bench).pressedTopMm + overMm;
+    const outline = pad.solid.outlineMm;
+    const crossings = outline.flatMap(([z, y], n) => {
+      const [z2, y2] = outline[(n + 1) % outline.length] ?? [z, y];
+      return y > height === y2 > height ? [] : [z + ((z2 - z) * (height - y)) / (y2 - y)];
+    });
+    const layout = benchLayout(bench);
+    const face = layout.faceZMm - (height - layout.seatTopRearMm) * Math.tan(layout.leanRad);
+    return face - Math.max(...crossings);
+  };
+
+  it('gives way for the pelvis and comes forward to the flat face at its apex', () => {
+    const curved = { ...flat, lumbar: { apexMm: 220, recessMm: 25 } };
+    expect(padOf(flat)[0]?.solid.shape).toBe('box');
+    expect(behindFace(curved, 60)).toBeCloseTo(25, 3);
+    expect(behindFace(curved, 100)).toBeCloseTo(25, 1);
+    // Half way between where it gives way fully, 110 mm, and its apex; the curve is drawn in short straight lines.
+    expect(behindFace(curved, 165)).toBeCloseTo(12.5, 0);
+    expect(behindFace(curved, 220)).toBeCloseTo(0, 3);
+    expect(behindFace(curved, 400)).toBeCloseTo(0, 3);
+  });
+
+  it('is never cut through, and stays flat with an apex alone or without a pad', () => {
+    const thin = { ...flat, backCushion: { ...flat.backCushion, thicknessMm: 50 } };
+    const deep = { ...thin, lumbar: { apexMm: 300, recessMm: 150 } };
+    // 6 mm of the pad remain, square to the face.
+    expect(behindFace(deep, 60)).toBeCloseTo(44 / Math.cos(benchLayout(deep).leanRad), 3);
+    expect(padOf({ ...flat, lumbar: { apexMm: 220, recessMm: 0 } })[0]?.solid.shape).toBe('box');
+    const bare = { ...deep, backCushion: { ...flat.backCushion, thicknessMm: 0 } };
+    expect(padOf(bare)).toEqual([]);
+  });
+});
+
 describe('a bulkhead behind a sill', () => {
   const wall = { ...newPiece('bulkhead', 'w1', 'W1', { xMm: 300, zMm: -50, turnDeg: 90 }), lengthMm: 3000 };
   const sill = newPiece('sill', 's1', 'S1', { xMm: 300, zMm: 200, turnDeg: 90 });

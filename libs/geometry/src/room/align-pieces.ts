@@ -20,7 +20,7 @@ interface Stretch {
  * @param document - the set
  * @param pieceIds - the reference first, then what moves; unknown ids are passed over
  * @param edge - which side of their footprints to bring in line
- * @returns the new set
+ * @returns the new set; the same object where all are in line already
  */
 export function alignPieces(
   document: SetDocument,
@@ -41,7 +41,7 @@ export function alignPieces(
  * @param document - the set
  * @param pieceIds - the piece that stays, then the others; unknown ids are passed over
  * @param axis - the direction of the row
- * @returns the new set; the same object where fewer than three can be spaced
+ * @returns the new set; the same object where fewer than three can be spaced, or stand so already
  */
 export function spacePieces(document: SetDocument, pieceIds: readonly string[], axis: RoomAxis): SetDocument {
   const row = spaceable(document, pieceIds)
@@ -73,8 +73,11 @@ export function spaceable(document: SetDocument, pieceIds: readonly string[]): P
   return namedPieces(document, pieceIds).filter((piece, n) => n === 0 || !piece.locked);
 }
 
-function moved(document: SetDocument, { id, at }: Piece, axis: RoomAxis, byMm: number): SetDocument {
-  if (byMm === 0) return document;
+/** A move of less is what arithmetic leaves over, millimetres. */
+const LEAST_MOVE_MM = 1e-7;
+
+function moved(document: SetDocument, { id, at, locked }: Piece, axis: RoomAxis, byMm: number): SetDocument {
+  if (locked || Math.abs(byMm) < LEAST_MOVE_MM) return document;
   return movePiece(document, id, axis === 'along' ? { zMm: at.zMm + byMm } : { xMm: at.xMm + byMm });
 }
 

@@ -192,6 +192,26 @@ describe('parameters', () => {
     }
   });
 
+  it('say the curve of a back, as far as it is asked', () => {
+    const bench = newPiece('bench', 'x', 'B1', HERE);
+    const said = (lumbar?: { apexMm: number; recessMm: number }, backHeightMm = 600) =>
+      specSentence({ ...bench, backHeightMm, ...(lumbar && { lumbar }) })
+        .more.map((token) => (token.kind === 'number' ? `[${token.key}]` : token.text))
+        .join('');
+    const both =
+      'back fullest [lumbar.apexMm] over the pressed seat and giving way [lumbar.recessMm] for the pelvis';
+    expect(said({ apexMm: 180, recessMm: 25 })).toContain(`front up, ${both} below it, [places.count]`);
+    expect(said({ apexMm: 0, recessMm: 25 })).toContain(
+      ', back giving way [lumbar.recessMm] for the pelvis, ',
+    );
+    expect(said({ apexMm: 180, recessMm: 0 })).toContain(
+      ', back fullest [lumbar.apexMm] over the pressed seat, ',
+    );
+    for (const flat of [said(), said({ apexMm: 0, recessMm: 0 }), said({ apexMm: 180, recessMm: 25 }, 0)]) {
+      expect(flat).not.toContain('lumbar');
+    }
+  });
+
   it('take both limits and say what was read beyond them', () => {
     for (const kind of PIECE_KINDS) {
       const { document, pieceId } = addPiece(emptySetDocument(), kind);

@@ -40,7 +40,7 @@ function unlike(vectors: readonly Vec3[]): Vec3[] {
 /**
  * Prepares a part for being tested against others.
  *
- * @param part - a placed part; the outline of a prism must be convex, a cylinder is taken with 24 sides
+ * @param part - a placed part; a prism is taken as its convex hull, a cylinder is taken with 24 sides
  * @returns the solid in the room, millimetres
  */
 export function convexPart(part: Part): ConvexPart {

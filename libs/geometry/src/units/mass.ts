@@ -4,6 +4,9 @@ import { fail, ok, type Result } from './result.ts';
 /** Kilograms in one avoirdupois pound, exactly. */
 export const KG_PER_POUND = 0.45359237;
 
+/** Pounds in one stone, the unit people are weighed in in Britain. */
+const POUNDS_PER_STONE = 14;
+
 /** Heaviest mass that is read, in kilograms. */
 export const HEAVIEST_MASS_KG = 100_000;
 
@@ -15,13 +18,16 @@ export interface MassError {
   message: string;
 }
 
-const ACCEPTED = 'a mass such as 170 lb, 77 kg or 77.5';
-const MASS = /^(\d+(?:[.,]\d*)?|[.,]\d+) ?(kg|kgs|kilograms?|kilos?|lb|lbs|pounds?)?$/;
+const ACCEPTED = 'a weight such as 170 lb, 12 st 2 lb, 77 kg or 77.5';
+const NUMBER = '\\d+(?:[.,]\\d*)?|[.,]\\d+';
+const POUND = 'lbs?|pounds?';
+const MASS = new RegExp(`^(${NUMBER}) ?(?:(kgs?|kilograms?|kilos?)|(${POUND}))?\\.?$`);
+const STONES = new RegExp(`^(${NUMBER}) ?(?:stones?|sts?)\\.?(?:[ ,]*(${NUMBER}) ?(?:${POUND})?\\.?)?$`);
 
 /**
  * Reads a mass.
  *
- * @param text - as typed: 170 lb, 77 kg, 77.5
+ * @param text - as typed: 170 lb, 12 st 2 lb, 12st 2, 77 kg, 77.5
  * @param bareUnit - unit of a bare number: the display unit
  * @returns kilograms, or an error with what was read and what is accepted
  */
@@ -31,14 +37,41 @@ export function parseMass(text: string, bareUnit: 'lb' | 'kg'): Result<number, M
     fail<MassError>({ code, read: text, accepted: ACCEPTED, message });
   if (plain === '') return error('empty', `Nothing was typed. Type ${ACCEPTED}.`);
   if (plain.startsWith('-')) return error('negative', `“${text.trim()}” is below zero. Type ${ACCEPTED}.`);
+  const stones = STONES.exec(plain);
   const parts = MASS.exec(plain);
-  if (parts === null) return error('unreadable', `“${text.trim()}” is not a mass. Type ${ACCEPTED}.`);
-  const pounds = (parts[2] ?? bareUnit).startsWith('lb') || (parts[2] ?? '').startsWith('pound');
-  const kg = Number((parts[1] ?? '').replace(',', '.')) * (pounds ? KG_PER_POUND : 1);
+  if (stones === null && parts === null) {
+    return error('unreadable', `“${text.trim()}” is not a weight. Type ${ACCEPTED}.`);
+  }
+  if (stones !== null && !isStonesAndPounds(stones)) {
+    return error(
+      'unreadable',
+      `“${text.trim()}” is not a weight: whole stones come before pounds, and fewer than 14 pounds behind them. Type ${ACCEPTED}.`,
+    );
+  }
+  const kg = stones === null ? kilograms(parts?.[1], parts?.[2], parts?.[3], bareUnit) : ofStones(stones);
   if (kg > HEAVIEST_MASS_KG) {
-    return error('too-large', `“${text.trim()}” is more than 100,000 kg, the heaviest mass read.`);
+    return error('too-large', `“${text.trim()}” is more than 100,000 kg, the heaviest weight read.`);
   }
   return ok(kg);
+}
+
+const numberOf = (text: string | undefined): number => Number((text ?? '0').replace(',', '.'));
+
+function isStonesAndPounds([, stones, pounds]: RegExpExecArray): boolean {
+  return pounds === undefined || (numberOf(pounds) < POUNDS_PER_STONE && Number.isInteger(numberOf(stones)));
+}
+
+const ofStones = ([, stones, pounds]: RegExpExecArray): number =>
+  (numberOf(stones) * POUNDS_PER_STONE + numberOf(pounds)) * KG_PER_POUND;
+
+function kilograms(
+  number: string | undefined,
+  metric: string | undefined,
+  pound: string | undefined,
+  bareUnit: 'lb' | 'kg',
+): number {
+  const inPounds = pound !== undefined || (metric === undefined && bareUnit === 'lb');
+  return numberOf(number) * (inPounds ? KG_PER_POUND : 1);
 }
 
 /**

@@ -29,6 +29,7 @@ const INCHES = new RegExp(`^(${QUANTITY}) ?${INCH}$`);
 const METRIC = new RegExp(
   `^(${QUANTITY}) ?(mm|millimetres?|millimeters?|cm|centimetres?|centimeters?|m|metres?|meters?)$`,
 );
+const METRES_CENTIMETRES = /^(\d) ?m ?(\d\d) ?(?:cm)?$/;
 const BARE = new RegExp(`^(${QUANTITY})$`);
 const TWO_NUMBERS = new RegExp(`^(${DECIMAL})(?: |-)(${QUANTITY})$`);
 const SLASHED = /^(\d+) ?\/ ?(\d+)$/;
@@ -118,6 +119,8 @@ function read(text: string, bareUnit: 'in' | 'mm'): number | undefined {
     const perUnit = unit.startsWith('mm') || unit.startsWith('milli') ? 1 : unit.startsWith('c') ? 10 : 1000;
     return scaled(metric[1], perUnit);
   }
+  const metres = METRES_CENTIMETRES.exec(text);
+  if (metres !== null) return Number(metres[1]) * 1000 + Number(metres[2]) * 10;
   const bare = BARE.exec(text);
   return bare === null ? undefined : scaled(bare[1], bareUnit === 'in' ? MM_PER_INCH : 1);
 }

@@ -5,6 +5,7 @@ import { formatExactLength, formatLength } from './format-length.ts';
 import { lengthStep, type LengthStyle } from './length-style.ts';
 import { formatMass, parseMass } from './mass.ts';
 import { parseLength } from './parse-length.ts';
+import { parseStature } from './parse-stature.ts';
 import { spokenExactLength, spokenLength } from './spoken-length.ts';
 
 const FEET: LengthStyle = { system: 'feet-inches', roundTo: 16, feet: true };
@@ -111,6 +112,50 @@ describe('parseLength', () => {
       { numRuns: 1000 },
     );
   });
+});
+
+describe('parseStature', () => {
+  const range = { minMm: 1000, maxMm: 2300 };
+  const heightOf = (text: string, unit: 'in' | 'mm') => {
+    const read = parseStature(text, unit, range);
+    return read.ok ? read.value : read.error.code;
+  };
+
+  // By hand: 71 in × 25.4, 71.5 in × 25.4, 72 in × 25.4.
+  it.each([
+    ["5'11", 1803.4],
+    ['5′ 11″', 1803.4],
+    ["5'11''", 1803.4],
+    ['5 ft 11 1/2', 1816.1],
+    ['5ft 11½', 1816.1],
+    ['5 foot 11', 1803.4],
+    ['180', 1800],
+    ['1.80 m', 1800],
+    ['1,80', 1800],
+    ['1.8', 1800],
+    ['1m80', 1800],
+    ['1 m 80', 1800],
+    ['180cm', 1800],
+    ['1800', 1800],
+    ['1800 mm', 1800],
+  ])('reads %s in either unit', (text, mm) => {
+    expect(heightOf(text, 'in')).toBe(mm);
+    expect(heightOf(text, 'mm')).toBe(mm);
+  });
+
+  it('takes no inches where millimetres rule, and no feet without a sign', () => {
+    expect(heightOf('72', 'in')).toBe(1828.8);
+    expect(heightOf('72', 'mm')).toBe(72);
+    expect(heightOf('5.11', 'in')).toBeCloseTo(129.794, 6);
+  });
+
+  it.each([
+    ['tall', 'unreadable'],
+    ['5 11', 'ambiguous'],
+    ['', 'empty'],
+    ["5'11 cm", 'unreadable'],
+    ['-180', 'negative'],
+  ])('refuses “%s” as %s', (text, code) => expect(heightOf(text, 'in')).toBe(code));
 });
 
 describe('formatLength', () => {
@@ -228,5 +273,45 @@ describe('angles and masses', () => {
     expect(formatMass(77, METRIC)).toBe('77\u202fkg');
     expect(formatMass(77, INCHES)).toBe('170\u202flb');
     expect(formatMass(2.6 * 0.45359237, INCHES)).toBe('2.6\u202flb');
+  });
+
+  // By hand: 11 st 4 lb is 158 lb, 71.66759446 kg; 11 st is 154 lb, 69.85322498 kg; 11.5 st is 161 lb.
+  it.each([
+    ['11 st 4', 71.66759446],
+    ['11 st 4 lb', 71.66759446],
+    ['11st 4lb', 71.66759446],
+    ['11st4lb', 71.66759446],
+    ['11 stone 4', 71.66759446],
+    ['11 stones 4 pounds', 71.66759446],
+    ['11 St. 4 lbs.', 71.66759446],
+    ['11 st, 4 lb', 71.66759446],
+    ['11 st', 69.85322498],
+    ['11 stone', 69.85322498],
+    ['11.5 st', 161 * 0.45359237],
+    ['11 st 4.5', 158.5 * 0.45359237],
+    ['158 lbs', 71.66759446],
+    ['158lb.', 71.66759446],
+    ['72 kg', 72],
+    ['72,5kg', 72.5],
+    ['72 kilos', 72],
+  ])('reads a weight of %s', (text, kg) => {
+    for (const unit of ['lb', 'kg'] as const) {
+      const read = parseMass(text, unit);
+      expect(read.ok && read.value).toBeCloseTo(kg, 8);
+    }
+  });
+
+  it.each([
+    ['11 st 14', /fewer than 14 pounds/],
+    ['11.5 st 4', /whole stones/],
+    ['11 4', /is not a weight/],
+    ['11 st 4 kg', /is not a weight/],
+    ['st 4', /is not a weight/],
+    ['9 stoned', /is not a weight/],
+  ])('refuses “%s” and says why', (text, why) => {
+    const read = parseMass(text, 'lb');
+    expect(read).toMatchObject({ ok: false, error: { code: 'unreadable', read: text } });
+    expect(!read.ok && read.error.message).toMatch(why);
+    expect(!read.ok && read.error.message).toContain('12 st 2 lb');
   });
 });

@@ -1,4 +1,5 @@
 import type { BodyData, Clothing } from '@settlewright/anthropometry';
+import { SITTER_COLOURS } from '@settlewright/geometry';
 import { ApiExtraModels, ApiProperty, ApiPropertyOptional, getSchemaPath } from '@nestjs/swagger';
 import type { Page } from '../../common/page.dto';
 import {
@@ -19,7 +20,7 @@ export class CastNameDto {
   name: string;
   @ApiProperty()
   role: string;
-  @ApiProperty({ minimum: 1, maximum: 6 })
+  @ApiProperty({ minimum: 1, maximum: SITTER_COLOURS.length })
   colour: number;
 
   static of(person: CastMember): CastNameDto {

@@ -1,5 +1,6 @@
 import type { BodyData, Clothing } from '@settlewright/anthropometry';
 import { ApiProperty, ApiPropertyOptional, PartialType } from '@nestjs/swagger';
+import { SITTER_COLOURS } from '@settlewright/geometry';
 import { IsIn, IsInt, IsObject, IsOptional, Max, Min } from 'class-validator';
 import { TextField } from '../../common/text-field';
 import { BODY_DATA, CLOTHING, STATURE_SOURCES, type StatureSource } from '../entities/cast-member.entity';
@@ -77,11 +78,11 @@ export class CreateCastMemberDto {
   @TextField({ max: NOTES_MAX, lines: true })
   notes?: string;
 
-  @ApiPropertyOptional({ minimum: 1, maximum: 6, description: 'chosen when absent' })
+  @ApiPropertyOptional({ minimum: 1, maximum: SITTER_COLOURS.length, description: 'chosen when absent' })
   @IsOptional()
   @IsInt()
   @Min(1)
-  @Max(6)
+  @Max(SITTER_COLOURS.length)
   colour?: number;
 }
 

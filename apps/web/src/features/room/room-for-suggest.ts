@@ -5,7 +5,7 @@ import { useStore } from 'zustand';
 import { setAddress } from './api.ts';
 import { useTakeStep } from './hooks/use-take-step.ts';
 import { useAutosave, usePicture, useSurroundings } from './room-context.tsx';
-import { sitterColour, sittersOf } from './sitters.ts';
+import { coloursOf, sittersOf, UNKNOWN_COLOUR } from './sitters.ts';
 
 /** What the pages about suggestions and shares need of the room; the route hands it on. */
 export interface RoomForSuggest {
@@ -34,7 +34,7 @@ export function useRoomForSuggest(): RoomForSuggest {
   const take = useTakeStep();
   const draftNumber = useStore(useAutosave().state, (state) => state.base.number);
   return useMemo(() => {
-    const seatOf = new Map(document.seating.map((seat) => [`${seat.pieceId}:${seat.place}`, seat.sitter]));
+    const colours = coloursOf(document, cast);
     const seated = sittersOf(document, cast, engine.model);
     const sitters = seated.filter(({ noBody }) => !noBody);
     const placeOf = new Map(sheet.rows.map((row) => [row.sitterId, row.placeId]));
@@ -51,10 +51,7 @@ export function useRoomForSuggest(): RoomForSuggest {
       placesWithoutBody: seated.length - sitters.length,
       ruleBook: engine.ruleBook,
       style,
-      colourOf: (sitterId) => {
-        const sitter = seatOf.get(placeOf.get(sitterId) ?? '');
-        return sitter ? sitterColour(sitter, cast) : 6;
-      },
+      colourOf: (sitterId) => colours.get(placeOf.get(sitterId) ?? '') ?? UNKNOWN_COLOUR,
     };
   }, [path, draftNumber, setName, document, sheet, maker, canEdit, take, cast, engine, style]);
 }

@@ -1,6 +1,7 @@
 import type { BodyModel, KnownPerson, Sitter } from '@settlewright/anthropometry';
 import type { SetDocument, SitterRef } from '@settlewright/geometry';
 import type { CastMember } from '@/lib/contract';
+import { sitterColours } from '@/lib/sitter-colours.ts';
 
 /** Percentile mannequins offered in the list of who may sit. */
 export const MANNEQUINS: Extract<SitterRef, { kind: 'mannequin' }>[] = [
@@ -30,10 +31,12 @@ export function sitterName(ref: SitterRef, cast: readonly CastMember[]): string 
   return cast.find((member) => member.id === ref.castId)?.name ?? 'removed sitter';
 }
 
-export function sitterColour(ref: SitterRef, cast: readonly CastMember[]): number {
-  if (ref.kind === 'cast') return cast.find((member) => member.id === ref.castId)?.colour ?? 6;
-  return ref.bodyData === 'women' ? 4 : 2;
-}
+/** Of who is no longer found at a place. */
+export const UNKNOWN_COLOUR = 6;
+
+/** The colour at each place of a set, all different while there are enough. */
+export const coloursOf = (document: SetDocument, cast: readonly CastMember[]) =>
+  sitterColours(document.seating, (castId) => cast.find((member) => member.id === castId)?.colour);
 
 /** What the checks know of a cast member; `undefined` when this reader may not see measures. */
 export function personOf(member: CastMember): KnownPerson | undefined {

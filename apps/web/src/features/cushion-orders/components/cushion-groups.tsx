@@ -1,4 +1,10 @@
-import { cushionDrawing, groupCushions, type CushionGroup, type CushionSpec } from '@settlewright/geometry';
+import {
+  curveWords,
+  cushionDrawing,
+  groupCushions,
+  type CushionGroup,
+  type CushionSpec,
+} from '@settlewright/geometry';
 import { useMemo, type ReactNode } from 'react';
 import { MarkTag } from '@/components/mark-tag.tsx';
 import { Measure } from '@/components/measure.tsx';
@@ -46,6 +52,7 @@ function Facts({ spec, words }: { spec: CushionSpec; words: OrderSpec }) {
       <Row name="Place">
         {show(spec.placeMm.widthMm)} × {show(spec.placeMm.depthMm)}, wood to wood
       </Row>
+      {spec.curve && <Row name="Curve">{curveWords(spec.curve, format.style)}</Row>}
       <Row name="Foam">
         {show(cut.foamMm.widthMm)} × {show(cut.foamMm.depthMm)} × {show(cut.foamMm.thicknessMm)},{' '}
         {foamText(foam, format.style)}

@@ -1,4 +1,4 @@
-import { placeFramesOf, planOf, type SetDocument } from '@settlewright/geometry';
+import { planOf, type SetDocument } from '@settlewright/geometry';
 import { useMemo, useState } from 'react';
 import { Button } from '@/components/button.tsx';
 import { commonScale } from '@/components/drawing-svg.tsx';
@@ -7,32 +7,20 @@ import { PaleBars } from '@/components/loading.tsx';
 import { Notice } from '@/components/notice.tsx';
 import { RuleHeading } from '@/components/rule-heading.tsx';
 import { ScaleBar } from '@/components/scale-bar.tsx';
-
 import { sayProblem } from '@/lib/problem.ts';
 import { useProduction } from '@/lib/production.ts';
+import { sitterColours } from '@/lib/sitter-colours.ts';
 import { useWorkshop } from '@/lib/workshop.ts';
 import { useSets } from '../api.ts';
 import { SetRow } from './set-row.tsx';
 
 const ROOM_PX = { width: 260, height: 132 };
-/** What a mannequin is drawn in. */
-const MANNEQUIN_COLOUR = 6;
 
-type Colour = 1 | 2 | 3 | 4 | 5 | 6;
-export type ColourOf = (castId: string) => Colour | undefined;
+export type ColourOf = (castId: string) => number | undefined;
 
 function planWithSitters(document: SetDocument, colourOf: ColourOf) {
-  const places = new Map(
-    placeFramesOf(document).map((frame) => [`${frame.pieceId} ${frame.place}`, frame.placeId]),
-  );
-  const sitters = document.seating.flatMap((seat) => {
-    const placeId = places.get(`${seat.pieceId} ${seat.place}`);
-    if (placeId === undefined) return [];
-    const colour =
-      seat.sitter.kind === 'cast' ? (colourOf(seat.sitter.castId) ?? MANNEQUIN_COLOUR) : MANNEQUIN_COLOUR;
-    return [{ placeId, colour } as const];
-  });
-  return planOf(document, { sitters });
+  const colours = sitterColours(document.seating, colourOf);
+  return planOf(document, { sitters: [...colours].map(([placeId, colour]) => ({ placeId, colour })) });
 }
 
 interface SetsProps {

@@ -5,6 +5,7 @@ import rules from '@settlewright/seed-data/fit-rules.json';
 import { render, screen, within } from '@testing-library/react';
 import userEvent from '@testing-library/user-event';
 import { MemoryRouter } from 'react-router-dom';
+import { Toaster } from 'sonner';
 import { beforeEach, describe, expect, it } from 'vitest';
 import { useAnnouncement } from '@/lib/announce.ts';
 import { useRoomAddress } from '../hooks/use-address.ts';
@@ -61,6 +62,7 @@ function open(document: SetDocument = banquette) {
       <RoomContext value={surroundings}>
         <RoomStoreContext value={store}>
           <Desk />
+          <Toaster />
         </RoomStoreContext>
       </RoomContext>
     </MemoryRouter>,
@@ -153,6 +155,29 @@ describe('several pieces in the hand', () => {
     expect(store.getState().document).toBe(banquette);
   });
 
+  it.each([
+    ['Line up', 'Middles, left to right', 'Already in line on their middles, left to right.'],
+    ['Space evenly', 'Left to right', 'Already spaced evenly, left to right.'],
+  ])('%s a second time changes nothing and says so', async (group, button, words) => {
+    const user = await choose('L1', 'L2', 'L4');
+    await user.click(press(button, group));
+    const after = store.getState().document;
+    expect(after).not.toBe(banquette);
+    await user.click(press(button, group));
+    expect(await screen.findByText(words)).toBeVisible();
+    expect(store.getState().document).toBe(after);
+  });
+
+  it('say that all the others are locked', async () => {
+    const pieces = banquette.pieces.map((one) => (one.id === 'l2' ? { ...one, locked: true } : one));
+    const user = open({ ...banquette, pieces });
+    await user.click(press('Choose several'));
+    for (const mark of ['L1', 'L2']) await user.click(row(mark));
+    await user.click(press('Left', 'Line up'));
+    expect(await screen.findByText('L2 is locked and stays.')).toBeVisible();
+    expect(undoNames(store).undo).toBeUndefined();
+  });
+
   it('let another one stay', async () => {
     const user = await choose('L2', 'L1');
     expect(screen.getByText(/^L2 stays where it is/)).toBeInTheDocument();
@@ -216,7 +241,8 @@ describe('several pieces in the hand', () => {
     await user.click(press('Choose several'));
     for (const mark of ['L1', 'L2', 'L3']) await user.click(row(mark));
     await user.click(press('Front'));
-    expect(said()).toBe('They stand so already');
+    expect(await screen.findByText('Already in line at the front.')).toBeVisible();
+    expect(undoNames(store).undo).toBeUndefined();
     await user.click(press('Left', 'Line up'));
     expect(said()).toMatch(/L2 is locked and stays/);
     expect(xOf('l3')).toBeCloseTo(xOf('l1'), 6);

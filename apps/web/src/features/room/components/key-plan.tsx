@@ -14,6 +14,8 @@ import { Measure } from '@/components/measure.tsx';
 import { RuleHeading } from '@/components/rule-heading.tsx';
 import type { RoomAddress } from '../hooks/use-address.ts';
 import type { RoomPicture } from '../picture.ts';
+import { initials } from '@/lib/short-name.ts';
+import { sitterFill } from '@/lib/sitter-colours.ts';
 import { useSurroundings } from '../room-context.tsx';
 import { VIEW_LETTERS, VIEW_TITLES, type ViewLetter } from '../scene/views.ts';
 import { EyeMark } from './eye-mark.tsx';
@@ -23,6 +25,8 @@ const LEFT = 34;
 const BOTTOM = 36;
 const TALLEST = 170;
 const HEAD_MM = 110;
+/** A head this large holds initials that can be read. */
+const READABLE = 7.5;
 
 const FILLS: Record<Piece['kind'], string> = {
   bench: 'var(--color-cloth-2)',
@@ -59,8 +63,14 @@ export function KeyPlan({ picture, address }: Props) {
   const frames = document.pieces.flatMap((piece) => placeFrames(piece, document));
   const dots = bodies.flatMap((body) => {
     const frame = frames.find((candidate) => candidate.placeId === body.placeId);
-    return frame ? [{ id: body.placeId, colour: body.colour, hip: frame.hipMm }] : [];
+    return frame
+      ? [{ id: body.placeId, colour: body.colour, words: initials(body.name), hip: frame.hipMm }]
+      : [];
   });
+  const radius = headRadius(
+    dots.map(({ hip }) => [hip[0] * scale, hip[2] * scale]),
+    HEAD_MM * scale,
+  );
   const cutX = selected ? x(selected.at.xMm) : undefined;
   const width = (maxX - minX) * scale;
 
@@ -109,14 +119,20 @@ export function KeyPlan({ picture, address }: Props) {
             />
           ))}
           {dots.map((dot) => (
-            <circle
-              key={dot.id}
-              cx={x(dot.hip[0])}
-              cy={z(dot.hip[2])}
-              r={Math.max(3.5, HEAD_MM * scale)}
-              fill={`var(--color-sitter-${dot.colour})`}
-              stroke="var(--color-pen)"
-            />
+            <g key={dot.id} transform={`translate(${x(dot.hip[0])} ${z(dot.hip[2])})`}>
+              <circle r={radius} fill={sitterFill(dot.colour)} stroke="var(--color-pen)" />
+              {radius >= READABLE && (
+                <text
+                  textAnchor="middle"
+                  dy="0.36em"
+                  fontSize={radius * 1.1}
+                  fontWeight={600}
+                  fill="var(--color-pen)"
+                >
+                  {dot.words}
+                </text>
+              )}
+            </g>
           ))}
           <g transform={`translate(${x(0)} ${z(0)}) scale(${scale})`}>
             <DrawnShapes shapes={asked} />
@@ -148,6 +164,14 @@ export function KeyPlan({ picture, address }: Props) {
       </RadioGroup>
     </section>
   );
+}
+
+/** Heads are drawn larger than to scale for their initials, as long as none covers another. */
+function headRadius(middles: readonly (readonly [number, number])[], toScale: number): number {
+  const apart = middles.flatMap(([ax, az], n) =>
+    middles.slice(n + 1).map(([bx, bz]) => Math.hypot(ax - bx, az - bz)),
+  );
+  return Math.max(3.5, toScale, Math.min(READABLE + 0.5, ...apart.map((gap) => gap / 2 - 0.5)));
 }
 
 function planOfSet(pieces: readonly Piece[], asked: DrawShape[] = []) {

@@ -199,9 +199,12 @@ export function SceneStage({ picture, piece, address, actions, several, onOpenCe
         <Toggle on={showBodies} onChange={setShowBodies}>
           Bodies
         </Toggle>
-        <Toggle on={showTapes} onChange={setShowTapes}>
-          Tapes
-        </Toggle>
+        {/* Whoever sees verdicts alone may have none to show. */}
+        {tapes.length > 0 && !clientView && (
+          <Toggle on={showTapes} onChange={setShowTapes}>
+            Tapes
+          </Toggle>
+        )}
         <Toggle on={clientView} onChange={address.setClientView}>
           Client view
         </Toggle>

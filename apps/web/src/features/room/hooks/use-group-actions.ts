@@ -10,13 +10,14 @@ import {
   type AlignEdge,
   type Piece,
   type RoomAxis,
+  type SetDocument,
 } from '@settlewright/geometry';
 import { useMemo } from 'react';
-import { announce } from '@/lib/announce.ts';
+import { toast } from 'sonner';
 import { joinWords } from '../choosing-words.ts';
 import { useSurroundings } from '../room-context.tsx';
 import { useRoomStore } from '../store.ts';
-import { useTakeStep, type TakeStep } from './use-take-step.ts';
+import { useTakeStep } from './use-take-step.ts';
 
 const EDGE_WORDS: Record<AlignEdge, string> = {
   left: 'on the left',
@@ -53,6 +54,11 @@ function sayLocked(pieces: readonly Piece[]): string | undefined {
   return marks.length === 1 ? `${marks[0]} is locked and stays` : `${joinWords(marks)} are locked and stay`;
 }
 
+/** Why nothing moved: "Already in line on the left.", or what may not move. */
+function sayStanding(already: string, [, ...others]: readonly Piece[]): string {
+  return others.every(({ locked }) => locked) ? `${sayLocked(others)}.` : `${already}.`;
+}
+
 /** What can be done to several pieces at once, each as one named step. */
 export function useGroupActions(choose: (ids: readonly string[]) => void): GroupActions {
   const store = useRoomStore();
@@ -61,21 +67,22 @@ export function useGroupActions(choose: (ids: readonly string[]) => void): Group
 
   return useMemo(() => {
     const now = () => store.getState().document;
-    const arrange: TakeStep = (next, step, aside) =>
-      next === now() ? announce('They stand so already') : take(next, step, aside);
+    // What changes nothing is no step; it is said where it can be seen, and read out from there.
+    const arrange = (next: SetDocument, step: string, already: string, aside?: string) =>
+      next.pieces.every((piece, n) => piece === now().pieces[n]) ? toast(already) : take(next, step, aside);
     return {
       nudge: (pieces, stepsX, stepsZ) => {
         const step = lengthStep(style);
         const next = movePieces(now(), idsOf(pieces), { xMm: stepsX * step, zMm: stepsZ * step });
         const by = formatLength(Math.hypot(stepsX, stepsZ) * step, style);
-        if (pieces.some(({ locked }) => !locked)) {
-          take(next, `Move ${pieces.length} pieces ${by}`, sayLocked(pieces));
-        }
+        const locked = sayLocked(pieces);
+        arrange(next, `Move ${pieces.length} pieces ${by}`, `${locked}.`, locked);
       },
       turn: (pieces, byDeg) =>
-        take(
+        arrange(
           turnPieces(now(), idsOf(pieces), byDeg),
           `Turn ${pieces.length} pieces ${Math.abs(byDeg)}° ${byDeg > 0 ? 'left' : 'right'}`,
+          `${sayLocked(pieces)}.`,
           sayLocked(pieces),
         ),
       copy: (pieces) => {
@@ -91,12 +98,14 @@ export function useGroupActions(choose: (ids: readonly string[]) => void): Group
         arrange(
           alignPieces(now(), idsOf(pieces), edge),
           `Line up ${pieces.length} pieces ${EDGE_WORDS[edge]}`,
+          sayStanding(`Already in line ${EDGE_WORDS[edge]}`, pieces),
           sayLocked(pieces.slice(1)),
         ),
       space: (pieces, axis) =>
         arrange(
           spacePieces(now(), idsOf(pieces), axis),
           `Space ${pieces.length} pieces evenly, ${AXIS_WORDS[axis]}`,
+          sayStanding(`Already spaced evenly, ${AXIS_WORDS[axis]}`, pieces),
           sayLocked(pieces.slice(1)),
         ),
     };

@@ -36,7 +36,7 @@ function Figure({ body, palette, shared, materials }: FigureProps) {
   const geometry = useMemo(() => geometryOf(body.mesh), [body.mesh]);
   const seams = useMemo(() => seamsOf(body.mesh), [body.mesh]);
   const material = useMemo(() => {
-    const colour = palette.sitters[body.colour - 1] ?? palette.sitters[5];
+    const colour = palette.sitters[body.colour - 1];
     return createBodyMaterial(shared, (colour ?? palette.pen).clone());
   }, [palette, body.colour, shared]);
   useEffect(() => () => geometry.dispose(), [geometry]);

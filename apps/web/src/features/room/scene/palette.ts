@@ -1,3 +1,4 @@
+import { SITTER_COLOURS } from '@settlewright/geometry';
 import { Vector3 } from 'three';
 import { MATERIALS } from './solids';
 
@@ -43,6 +44,6 @@ export function readPalette(element: Element): Palette {
     floor: token('floor'),
     wall: token('wall'),
     shade: token('shade'),
-    sitters: [1, 2, 3, 4, 5, 6].map((n) => token(`sitter-${n}`)),
+    sitters: SITTER_COLOURS.map((n) => token(`sitter-${n}`)),
   };
 }

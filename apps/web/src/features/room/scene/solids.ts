@@ -84,6 +84,12 @@ function addCylinder(out: SolidArrays, part: Part, radius: number, height: numbe
   out.roundNormals.push(...out.normals.slice(start));
 }
 
+/** Sides that meet at less than this are one curved face: no ink runs between them, radians. */
+const CORNER_RAD = 0.35;
+
+const turns = ([ax, ay]: [number, number], [bx, by]: [number, number]): boolean =>
+  Math.abs(Math.atan2(ax * by - ay * bx, ax * bx + ay * by)) > CORNER_RAD;
+
 function addPrism(out: SolidArrays, part: Part, solid: Extract<Solid, { shape: 'prism' }>, material: number) {
   const { at, along } = placer(part);
   const outline = solid.outlineMm;
@@ -102,7 +108,8 @@ function addPrism(out: SolidArrays, part: Part, solid: Extract<Solid, { shape: '
     addFace(out, [at(x0, y0, z), at(x0, y0, -z), at(x1, y1, -z), at(x1, y1, z)], normal, material);
     addEdge(out, at(x0, y0, z), at(x1, y1, z), 1);
     addEdge(out, at(x0, y0, -z), at(x1, y1, -z), 1);
-    addEdge(out, at(x0, y0, -z), at(x0, y0, z), 1);
+    const [xb, yb] = outline.at(n - 1) ?? [0, 0];
+    if (turns([x0 - xb, y0 - yb], [x1 - x0, y1 - y0])) addEdge(out, at(x0, y0, -z), at(x0, y0, z), 1);
   });
 }
 
