@@ -10,7 +10,7 @@ import {
   type SitterRef,
 } from '@settlewright/geometry';
 import type { CastPerson } from '../cast/known-person';
-import { FitCheckService } from './fit-check.service';
+import { FitCheckService, type Turns } from './fit-check.service';
 
 const fit = new FitCheckService();
 const HETTY: CastPerson = {
@@ -53,6 +53,22 @@ describe('fit sheets made on the server', () => {
     ]);
   });
 
+  it('know no check of a place whose person was erased, draw no body there and ask for no measure', async () => {
+    const erased: CastPerson = { ...HETTY, name: 'removed sitter 1', noBody: true };
+    const document = withSitters({ kind: 'cast', castId: HETTY.id }, mannequin(50));
+    const { rows } = fit.sheetFor(document, [erased], null);
+    const verdicts = rows[0]!.cells.flatMap(({ outcome }) =>
+      outcome.kind === 'verdict' ? [outcome.verdict] : [],
+    );
+    expect(rows[0]!.name).toBe('removed sitter 1');
+    expect(verdicts.length).toBeGreaterThan(3);
+    expect(new Set(verdicts)).toEqual(new Set(['notKnown']));
+    expect(fit.bodiesFor(document, [erased]).map(({ placeId }) => placeId)).toEqual([rows[1]!.placeId]);
+    for await (const next of fit.measureNext(document, [erased], null, { left: 9, leftOut: [] })) {
+      throw new Error(`asked for a measure of ${next.castId}`);
+    }
+  });
+
   it('leave out a person who is not known', () => {
     const sheet = fit.sheetFor(withSitters({ kind: 'cast', castId: HETTY.id }), [], null);
     expect(sheet.rows).toEqual([]);
@@ -92,18 +108,18 @@ describe('what to measure next', () => {
     const other = { ...HETTY, id: '00000000-0000-4000-8000-000000000002' };
     const seated = [HETTY, other].map(({ id }) => ({ kind: 'cast' as const, castId: id }));
     const ask = async (document: SetDocument) => {
-      const turns = { left: 1, leftOut: 0 };
+      const turns: Turns = { left: 1, leftOut: [] };
       const found: string[] = [];
       for await (const { castId } of fit.measureNext(document, [HETTY, other], null, turns))
         found.push(castId);
       return { found, ...turns };
     };
     const document = withSitters(...seated);
-    expect(await ask(document)).toEqual({ found: [HETTY.id], left: 0, leftOut: 1 });
-    expect(await ask(document)).toEqual({ found: [HETTY.id, other.id], left: 0, leftOut: 0 });
-    expect(await ask(document)).toEqual({ found: [HETTY.id, other.id], left: 1, leftOut: 0 });
+    expect(await ask(document)).toEqual({ found: [HETTY.id], left: 0, leftOut: [other.id] });
+    expect(await ask(document)).toEqual({ found: [HETTY.id, other.id], left: 0, leftOut: [] });
+    expect(await ask(document)).toEqual({ found: [HETTY.id, other.id], left: 1, leftOut: [] });
     // Another set is another question.
     const changed = { ...document, asked: { ...document.asked, lensHeightMm: 1200 } };
-    expect(await ask(changed)).toEqual({ found: [HETTY.id], left: 0, leftOut: 1 });
+    expect(await ask(changed)).toEqual({ found: [HETTY.id], left: 0, leftOut: [other.id] });
   });
 });

@@ -32,7 +32,7 @@ export interface SitterNext {
 /** How many people may be worked out anew for one request, and how many were not for want of turns. */
 export interface Turns {
   left: number;
-  leftOut: number;
+  leftOut: string[];
 }
 
 const RECENT = 500;
@@ -75,7 +75,7 @@ export class FitCheckService {
       let next = this.recent.get(key);
       if (!next) {
         if (turns.left === 0) {
-          turns.leftOut += 1;
+          turns.leftOut.push(sitter.id);
           continue;
         }
         turns.left -= 1;

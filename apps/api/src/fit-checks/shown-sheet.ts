@@ -22,6 +22,10 @@ export const CAUTION =
   'Guidance, not certification. Local codes and the authority having jurisdiction decide. ' +
   'Body data describe surveyed groups, not a person: try the seat.';
 
+/** Stands with a sheet for readers who see no measures. */
+export const ROUGH =
+  'Bodies are personal, so margins of sitters are rough here: at least so much is left, at most so much is short.';
+
 /** When the probability that a sheet's verdicts ask for came into force, as far as anybody set it. */
 export interface ConfidenceSince {
   kind: 'set' | 'issued';

@@ -4,7 +4,7 @@ import { FitCheckService } from '../fit-checks/fit-check.service';
 import { fitSheetCsv } from '../fit-checks/fit-sheet-csv';
 import type { FitSheetPaper } from '../fit-checks/paper/fit-sheet-paper';
 import { fitSheetPdf } from '../fit-checks/paper/fit-sheet-pdf';
-import { type ConfidenceSince, confidenceSentence } from '../fit-checks/shown-sheet';
+import { type ConfidenceSince, confidenceSentence, ROUGH } from '../fit-checks/shown-sheet';
 import { ProductionsService } from '../productions/productions.service';
 import type { Workshop } from '../workshops/entities/workshop.entity';
 import { WorkshopsService } from '../workshops/workshops.service';
@@ -64,13 +64,16 @@ export class FitSheetFilesService {
     { productionId, setId, letter }: SheetPlace,
     { confidenceSetAt, timeZone }: Workshop,
   ): Promise<Source> {
-    const { ruleBook } = this.fit;
+    const sentence = (shown: SeenSheet, since: ConfidenceSince | null) => {
+      const words = confidenceSentence(shown, this.fit.ruleBook, since, timeZone);
+      return shown.detail === 'full' ? words : `${words} ${ROUGH}`;
+    };
     if (letter === undefined) {
       const { draft, shown } = await this.fitSheets.ofDraft(member, productionId, setId);
       const since: ConfidenceSince | null = confidenceSetAt && { kind: 'set', at: confidenceSetAt };
       return {
         shown,
-        confidence: confidenceSentence(shown, ruleBook, since, timeZone),
+        confidence: sentence(shown, since),
         state: { kind: 'draft', number: draft.number },
         at: draft.savedAt,
         by: draft.savedBy?.name ?? '',
@@ -81,7 +84,7 @@ export class FitSheetFilesService {
     const since: ConfidenceSince = { kind: 'issued', at: revision.issuedAt };
     return {
       shown,
-      confidence: confidenceSentence(shown, ruleBook, since, timeZone),
+      confidence: sentence(shown, since),
       state: { kind: 'revision', letter: revision.letter },
       at: revision.issuedAt,
       by: revision.issuedBy?.name ?? '',

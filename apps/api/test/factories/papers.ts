@@ -12,13 +12,42 @@ export async function readPaper(test: TestApp, person: Person, path: string): Pr
   return paperText(body as Buffer);
 }
 
+/** A word on a paper and where it stands, in points from the upper left. */
+export interface PlacedWord {
+  page: number;
+  text: string;
+  xMin: number;
+  yMin: number;
+  xMax: number;
+  yMax: number;
+}
+
+/** Every word of a paper with its place. */
+export async function paperWords(content: Buffer): Promise<PlacedWord[]> {
+  const pages = (await readPdf(content, '-bbox')).split('<page ').slice(1);
+  return pages.flatMap((text, n) =>
+    [...text.matchAll(/<word xMin="(.+?)" yMin="(.+?)" xMax="(.+?)" yMax="(.+?)">(.*?)<\/word>/g)].map(
+      ([, xMin, yMin, xMax, yMax, word = '']): PlacedWord => ({
+        page: n + 1,
+        text: word,
+        xMin: Number(xMin),
+        yMin: Number(yMin),
+        xMax: Number(xMax),
+        yMax: Number(yMax),
+      }),
+    ),
+  );
+}
+
 /** The words on a paper, as they stand in its lines. */
-export async function paperText(content: Buffer): Promise<string> {
+export const paperText = (content: Buffer): Promise<string> => readPdf(content, '-layout');
+
+async function readPdf(content: Buffer, how: '-layout' | '-bbox'): Promise<string> {
   const folder = await mkdtemp(join(tmpdir(), 'paper-'));
   try {
     const file = join(folder, 'paper.pdf');
     await writeFile(file, content);
-    const { stdout } = await promisify(execFile)('pdftotext', ['-layout', file, '-']);
+    const { stdout } = await promisify(execFile)('pdftotext', [how, file, '-']);
     return stdout;
   } finally {
     await rm(folder, { recursive: true });

@@ -1,7 +1,7 @@
 import type { SetDocument } from '@settlewright/geometry';
 import { Injectable } from '@nestjs/common';
 import type { MemberInfo } from '../../common/access.decorator';
-import { FitCheckService, type SitterNext } from '../../fit-checks/fit-check.service';
+import { FitCheckService, type SitterNext, type Turns } from '../../fit-checks/fit-check.service';
 import { ProductionsService } from '../../productions/productions.service';
 import { DraftsService } from '../../sets/drafts.service';
 import { SetAccess } from '../../sets/set-access';
@@ -13,6 +13,12 @@ import type { MeasureNextDto, PersonNextDto } from './dto/measure-next.dto';
 
 /** Places worked out anew for one request: some ten seconds of work. What was worked out lately is not counted. */
 const MOST_PLACES = 40;
+
+/** What to measure, and of whom not every place was looked at. */
+interface Found {
+  items: PersonNextDto[];
+  leftOut: string[];
+}
 
 interface NamedDocument {
   name: string;
@@ -35,17 +41,17 @@ export class MeasureNextService {
   async ofSet(member: MemberInfo, productionId: string, setId: string): Promise<MeasureNextDto> {
     const { name } = await this.access.forReading(member, productionId, setId);
     const { document } = await this.drafts.get(member, productionId, setId);
-    return this.of(productionId, [{ name, document }], await this.cast.all(member, productionId));
+    return told(await this.of(productionId, [{ name, document }], await this.cast.all(member, productionId)));
   }
 
   /** Of everybody, over all sets in use that they sit in. */
   async ofProduction(member: MemberInfo, productionId: string): Promise<MeasureNextDto> {
     const people = await this.cast.all(member, productionId);
-    return this.ofPeople(productionId, people);
+    return told(await this.ofPeople(productionId, people));
   }
 
   /** Of some people of a production that the caller may see. */
-  async ofPeople(productionId: string, people: readonly CastMember[]): Promise<MeasureNextDto> {
+  async ofPeople(productionId: string, people: readonly CastMember[]): Promise<Found> {
     return this.of(productionId, await this.sets.inUse(productionId), people);
   }
 
@@ -53,10 +59,10 @@ export class MeasureNextService {
     productionId: string,
     sets: readonly NamedDocument[],
     people: readonly CastMember[],
-  ): Promise<MeasureNextDto> {
+  ): Promise<Found> {
     const { confidence } = await this.productions.workshopOf(productionId);
     const found = new Map<string, PersonNextDto>();
-    const turns = { left: MOST_PLACES, leftOut: 0 };
+    const turns: Turns = { left: MOST_PLACES, leftOut: [] };
     for (const { name, document } of sets) {
       const sitters = this.fit.measureNext(document, people.map(castPerson), confidence, turns);
       for await (const sitter of sitters) {
@@ -70,6 +76,8 @@ export class MeasureNextService {
     return { items, leftOut: turns.leftOut };
   }
 }
+
+const told = ({ items, leftOut }: Found): MeasureNextDto => ({ items, leftOut: leftOut.length });
 
 /** A person who sits twice has the two findings added up. */
 function add(found: Map<string, PersonNextDto>, set: string, { castId, next }: SitterNext): void {

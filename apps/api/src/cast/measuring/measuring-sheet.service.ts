@@ -33,9 +33,13 @@ export class MeasuringSheetService {
       throw Problem.conflict('nobody-to-measure', 'There is nobody in this production to measure yet.');
     }
     const workshop = await this.workshops.get(member.workshopId);
-    const { items: found } = await this.next.ofPeople(productionId, people);
+    const { items, leftOut } = await this.next.ofPeople(productionId, people);
     const content = measuringSheetPdf({
-      people: people.map((person) => ({ person, next: found.find((one) => one.castId === person.id) })),
+      people: people.map((person) => ({
+        person,
+        next: items.find((one) => one.castId === person.id),
+        placesLeftOut: leftOut.filter((id) => id === person.id).length,
+      })),
       ruleBook: this.fit.ruleBook,
       style: { system: production.units, roundTo: production.roundTo },
       paper: workshop.paper,

@@ -1,4 +1,6 @@
 import type { Verdict } from '@settlewright/anthropometry';
+import { paragraph } from '../../paper/paragraph';
+import { leading } from '../../paper/sheet';
 import { VERDICT_WORDS } from '../shown-sheet';
 import type { FitSheetPaper } from './fit-sheet-paper';
 import type { Flow } from './flow';
@@ -25,6 +27,6 @@ export function drawHeading(flow: Flow, { sheet: fit, confidence }: FitSheetPape
   }
   sheet.text(KEY, flow.left, baseline + 6.4);
   sheet.text(STANCE, flow.right, baseline + 6.4, { align: 'right' });
-  sheet.text(confidence, flow.left, baseline + 11);
-  flow.y = baseline + 14.2;
+  const after = paragraph(sheet, confidence, flow.left, baseline + 11, flow.right - flow.left);
+  flow.y = after - leading(9) + 3.2;
 }

@@ -1,7 +1,7 @@
 import { type NextMeasureKey, type RuleBook, TAPE_MEASURE_KEYS } from '@settlewright/anthropometry';
 import { formatLength, formatMass, type LengthStyle } from '@settlewright/geometry';
 import { Pack, type Paper } from '../../../paper/pack';
-import { paragraph } from '../../../paper/paragraph';
+import { linesNeeded, paragraph } from '../../../paper/paragraph';
 import { leading, PEN, type Sheet } from '../../../paper/sheet';
 import { drawFrame, frameOf, type TitleCell } from '../../../paper/title-block';
 import type { PersonNextDto } from '../dto/measure-next.dto';
@@ -12,6 +12,8 @@ interface PersonToMeasure {
   person: CastMember;
   /** Absent for somebody who sits in no set. */
   next: PersonNextDto | undefined;
+  /** Places of this person that were not looked at for want of time. */
+  placesLeftOut: number;
 }
 
 export interface MeasuringSheetInput {
@@ -35,6 +37,9 @@ const HOW =
 const PRIVACY =
   'This sheet is personal data. Ask first, measure where others do not look on, show it to nobody who does not need ' +
   'it, and destroy it once the numbers are entered.';
+/** Largest first; the smallest takes as many lines as it needs. */
+const NAME_SIZES = [20, 15, 11] as const;
+const MOST_NAME_LINES = 2;
 const ALL_KEYS: readonly NextMeasureKey[] = ['stature', 'weight_kg', ...TAPE_MEASURE_KEYS];
 
 /** Sheets to write measures on: for each person what settles most first, then the others. */
@@ -61,13 +66,14 @@ export function measuringSheetPdf(input: MeasuringSheetInput): Buffer {
   return pack.bytes();
 }
 
-function drawPerson(pack: Pack, input: MeasuringSheetInput, { person, next }: PersonToMeasure): void {
+function drawPerson(pack: Pack, input: MeasuringSheetInput, measured: PersonToMeasure): void {
+  const { person, next } = measured;
   let left = boxesOf(input, person, next);
   for (let first = true; left.length > 0; first = false) {
     const sheet = pack.addSheet();
     const frame = frameOf(sheet);
     const width = frame.right - frame.left - 2 * PAD_MM;
-    const top = first ? drawHead(sheet, person, frame.left + PAD_MM, frame.top, width) : frame.top + PAD_MM;
+    const top = first ? drawHead(sheet, measured, frame.left + PAD_MM, frame.top, width) : frame.top + PAD_MM;
     const rows = Math.floor((frame.bottom - 1 - top + GAP_MM) / (BOX_HEIGHT_MM + GAP_MM));
     const boxWidth = (width - (COLUMNS - 1) * GAP_MM) / COLUMNS;
     left.slice(0, rows * COLUMNS).forEach((box, n) => {
@@ -83,17 +89,35 @@ function drawPerson(pack: Pack, input: MeasuringSheetInput, { person, next }: Pe
 }
 
 /** Name, part and how to sit; returns y under it. */
-function drawHead(sheet: Sheet, person: CastMember, x: number, top: number, width: number): number {
-  sheet.text(person.name, x, top + 10, { size: 20, weight: 300 });
-  sheet.text(person.role, x, top + 16);
+function drawHead(
+  sheet: Sheet,
+  { person, placesLeftOut }: PersonToMeasure,
+  x: number,
+  top: number,
+  width: number,
+): number {
+  const own = width * 0.32;
+  const size =
+    NAME_SIZES.find((one) => linesNeeded(sheet, person.name, own, { size: one }) <= MOST_NAME_LINES) ??
+    NAME_SIZES[NAME_SIZES.length - 1];
+  const style = { size, weight: 300 } as const;
+  const afterName = paragraph(sheet, person.name, x, top + 2.4 + 0.38 * size, own, style);
+  const role = afterName - leading(size) + 6;
+  const afterRole = person.role === '' ? role : paragraph(sheet, person.role, x, role, own);
   const column = x + width * 0.34;
   const room = width * 0.66;
-  const after = paragraph(sheet, HOW, column, top + 5.4, room);
-  const foot = paragraph(sheet, PRIVACY, column, after, room, { weight: 600 });
-  const y = Math.max(foot - leading(9), top + 16) + 2;
+  let foot = paragraph(sheet, HOW, column, top + 5.4, room);
+  foot = paragraph(sheet, PRIVACY, column, foot, room, { weight: 600 });
+  if (placesLeftOut > 0) foot = paragraph(sheet, leftOutWords(placesLeftOut), column, foot, room);
+  const y = Math.max(foot - leading(9), afterRole - leading(9)) + 2;
   sheet.line(x, y, x + width, y, { pen: PEN.hair });
   return y + 2.4;
 }
+
+/** The order of a sheet rests on every place that was looked at. */
+const leftOutWords = (places: number): string =>
+  `${places === 1 ? '1 place' : `${places} places`} of this person could not be looked at in time, so another ` +
+  'measure may settle more. Print again for the rest.';
 
 /** What to take first with the reason, then the rest in the order of the form. */
 function boxesOf(

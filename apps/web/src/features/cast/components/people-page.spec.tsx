@@ -71,6 +71,23 @@ describe('PeoplePage', () => {
     expect(within(dialog).getByRole('button', { name: 'Measuring sheet (PDF)' })).toBeVisible();
   });
 
+  it('says how many places were not looked at, and looks at the rest', async () => {
+    signInAs('designer');
+    let asked = 0;
+    server.use(
+      http.get(castPath, () => HttpResponse.json(page([HETTY]))),
+      http.get(`${castPath}/measure-next`, () => {
+        asked += 1;
+        return HttpResponse.json({ items: NEXT, leftOut: asked === 1 ? 3 : 0 });
+      }),
+    );
+    show();
+    expect(await screen.findByText(/3 taken places were not looked at yet/)).toBeVisible();
+    await userEvent.click(screen.getByRole('button', { name: 'Look at the rest' }));
+    await waitFor(() => expect(screen.queryByText(/not looked at yet/)).toBeNull());
+    expect(asked).toBe(2);
+  });
+
   it('shows a carpenter names and parts, and no way to a number', async () => {
     signInAs('carpenter');
     server.use(

@@ -18,6 +18,9 @@ import { sayProblem } from '@/lib/problem.ts';
 import { useProduction } from '@/lib/production.ts';
 import { useWorkshop } from '@/lib/workshop.ts';
 import { type CastPlace, csvPath, exportPath, measuringSheetPath, useCast, useMeasureNext } from '../api.ts';
+import { measureColumns, nameColumn, namesOnly } from './people-columns.tsx';
+import { NextLeftOut } from './next-left-out.tsx';
+import { RowMenu } from './row-menu.tsx';
 import { knownBy } from '../known-by.ts';
 import { EraseDialog } from './erase-dialog.tsx';
 import { ImportDialog } from './import-dialog.tsx';
@@ -127,6 +130,7 @@ export function PeoplePage() {
   const format = useFormat();
   const place = useMemo(
     () => ({ workshopId: workshop.id, productionId: production.id }),
+        {people.length > 0 && workshop.canEdit && <NextLeftOut place={place} />}
     [workshop.id, production.id],
   );
   const cast = useCast(place);
