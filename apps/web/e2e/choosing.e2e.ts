@@ -158,7 +158,7 @@ describe('choosing dimensions for people known by their height alone', () => {
 
   it('keeps a look knowingly, with its reason', async () => {
     await page.goto(`${room}/stick?d=seat-depth`);
-    await page.getByLabel('Note for the known differences').fill('As deep as in the photograph.');
+    await page.getByLabel('Why it is kept').fill('As deep as in the photograph.');
     await page.getByRole('button', { name: /^Keep .* with this note$/ }).click();
     await untilSaved(page);
     await page.goto(room);

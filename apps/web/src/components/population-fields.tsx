@@ -12,15 +12,16 @@ interface PopulationFieldsProps {
 /** Whom a share is about: a population, and how many of 100 are women where it holds both. */
 export function PopulationFields({ crowd, own = [], onChange }: PopulationFieldsProps) {
   const { populationId, women } = crowd;
+  const options = [...own, ...CROWDS];
   return (
     <div className="grid gap-4 phone:grid-cols-2">
       <Combobox
         label="Population"
         value={populationId}
-        choices={[...own, ...CROWDS].map((one) => ({ id: one.id, words: one.words, detail: one.kind }))}
+        choices={options.map((one) => ({ id: one.id, words: one.words, detail: one.kind }))}
         onChange={(chosen) => onChange({ women, populationId: chosen ?? DEFAULT_CROWD.populationId })}
       />
-      {onlySex(populationId) === undefined && (
+      {onlySex(populationId, options) === undefined && (
         <MixField women={women} onChange={(mix) => onChange({ populationId, women: mix })} />
       )}
     </div>

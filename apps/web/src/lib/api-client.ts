@@ -103,9 +103,10 @@ export const api = {
   patch: <T>(path: string, body?: unknown, options?: RequestOptions) =>
     request<T>('PATCH', path, { ...options, body }),
   delete: <T = void>(path: string, options?: RequestOptions) => request<T>('DELETE', path, options),
-  /** A file with its name as the server gives it. */
+  /** A file with its name as the server gives it; with a body it is asked for by POST. */
   file: async (path: string, options?: RequestOptions): Promise<{ blob: Blob; name: string }> => {
-    const response = await answer('GET', path, options ?? {});
+    const method = options?.body === undefined ? 'GET' : 'POST';
+    const response = await answer(method, path, options ?? {});
     if (!response.ok) throw await readProblem(response);
     const named = /filename="?([^";]+)"?/.exec(response.headers.get('Content-Disposition') ?? '');
     return { blob: await response.blob(), name: named?.[1] ?? path.split('/').at(-1) ?? 'file' };

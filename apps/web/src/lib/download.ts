@@ -1,8 +1,13 @@
 import { api } from './api-client.ts';
 
 /** Fetches a file with the session's token and hands it to the browser to keep. */
-export async function download(path: string, query?: Record<string, string>): Promise<void> {
-  const { blob, name } = await api.file(path, { query });
+export async function download(
+  path: string,
+  query?: Record<string, string>,
+  /** What the file is about, where that is more than an address holds. */
+  body?: unknown,
+): Promise<void> {
+  const { blob, name } = await api.file(path, { query, body });
   const url = URL.createObjectURL(blob);
   const link = document.createElement('a');
   link.href = url;

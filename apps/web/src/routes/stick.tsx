@@ -1,12 +1,14 @@
 import { useMemo } from 'react';
 import { useParams } from 'react-router-dom';
 import { ChoicesContext, StickPage } from '@/features/choices/index.ts';
-import { SetSheet, useRoomForChoices } from '@/features/room/index.ts';
+import { SetSheet, useDraftPaper, useRoomForChoices } from '@/features/room/index.ts';
 
 function Sheet({ roomTo }: { roomTo: string }) {
   const room = useRoomForChoices();
+  const paper = useDraftPaper();
+  const view = useMemo(() => ({ ...room, paper }), [room, paper]);
   return (
-    <ChoicesContext value={room}>
+    <ChoicesContext value={view}>
       <StickPage roomTo={roomTo} fitTo={`${roomTo}/fit`} />
     </ChoicesContext>
   );

@@ -1,9 +1,11 @@
 import type { FitCell, FitSheet, SitterRow, VerdictOutcome } from '@settlewright/anthropometry';
 import type { SetDocument } from '../room/document.ts';
 import type { Dimension } from './dimension.ts';
+import { worseOf } from './candidates.ts';
 import { movingRules } from './moving-rules.ts';
+import { cellsOf, type CellState } from './sheet-changes.ts';
+import { sittersAlong, verdictsAlong, worstState, type SitterAlong } from './sitters-along.ts';
 import { stretches, whereAll, type Stretch } from './stretches.ts';
-import { cellsOf, STATE_RANK, stateOf, type CellState } from './sheet-changes.ts';
 
 /** One sitter's answer along a dimension. */
 export interface StickRow {
@@ -50,6 +52,10 @@ export interface StoryStick {
    */
   allFit: Stretch[];
   allTight: Stretch[];
+  /** Everybody by every rule of `ruleIds`, whichever the rows show. */
+  sitters: SitterAlong[];
+  /** At each value, answers about pieces and ways that are good in the present set and not there. */
+  worse: number[];
 }
 
 const MOST_VALUES = 96;
@@ -110,6 +116,8 @@ export function* storyStick(input: {
     clauses: clausesOf(values, sheets),
     allFit: whereAll(values, told, ['fits']),
     allTight: whereAll(values, told, ['fits', 'tight']),
+    sitters: sittersAlong(present, sheets, moving),
+    worse: sheets.map((sheet) => (present ? worseOf(present, sheet) : 0)),
   };
 }
 
@@ -125,20 +133,10 @@ function stickRow(
   sheets: readonly FitSheet[],
   shown: ReadonlySet<string>,
 ): StickRow {
-  const along = sheets.map((sheet) => {
-    const cells = sheet.rows.find(({ placeId }) => placeId === row.placeId)?.cells ?? [];
-    return cells.filter(({ ruleId, outcome }) => shown.has(ruleId) && outcome.kind === 'verdict');
-  });
-  const asked = new Set(
-    row.cells
-      .filter(({ ruleId, outcome }) => shown.has(ruleId) && outcome.kind === 'verdict')
-      .map(({ ruleId }) => ruleId),
-  );
-  const isGone = (cells: readonly FitCell[]) =>
-    [...asked].some((id) => cells.every(({ ruleId }) => ruleId !== id));
+  const along = verdictsAlong(row, sheets, shown);
   const rooms = (room: (outcome: VerdictOutcome) => number) =>
-    along.map((cells) =>
-      isGone(cells)
+    along.map(({ cells, gone }) =>
+      gone > 0
         ? -Infinity
         : Math.min(...cells.map(({ outcome }) => (outcome.kind === 'verdict' ? room(outcome) : Infinity))),
     );
@@ -147,7 +145,7 @@ function stickRow(
     sitterId,
     placeId,
     name,
-    estimated: along.some((cells) =>
+    estimated: along.some(({ cells }) =>
       cells.some(({ outcome }) => outcome.kind === 'verdict' && outcome.estimated),
     ),
     fits: stretches(values, rooms(roomToPass)),
@@ -163,7 +161,7 @@ function stickRow(
       values,
       rooms(({ margin, marginRange }) => marginRange?.high ?? margin),
     ),
-    states: along.map((cells) => (isGone(cells) ? 'gone' : worstOf(cells))),
+    states: along.map(({ cells, gone }) => (gone > 0 ? 'gone' : worstState(cells))),
   };
 }
 
@@ -172,14 +170,6 @@ const roomToPass = ({ value, pass }: VerdictOutcome): number =>
     pass.lower === undefined ? Infinity : value - pass.lower,
     pass.upper === undefined ? Infinity : pass.upper - value,
   );
-
-const worstOf = (cells: readonly FitCell[]): CellState =>
-  cells
-    .map((cell) => stateOf(cell) ?? 'gone')
-    .reduce<CellState>((worst, state) => {
-      if (worst === 'gone') return state;
-      return STATE_RANK[state] < STATE_RANK[worst] ? state : worst;
-    }, 'gone');
 
 /** Clauses that are asked and answer differently along the dimension. */
 function clausesOf(values: readonly number[], sheets: readonly FitSheet[]): StickClause[] {

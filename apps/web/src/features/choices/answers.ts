@@ -37,6 +37,12 @@ export function shortBy({ ruleId, outcome }: Answer, ruleBook: RuleBook, style: 
   return `${amountText(Math.max(0, -outcome.margin), unit, style)} short`;
 }
 
+/** "+1½″ ± 1 tight", as it stands over a lath. */
+export function verdictLine(answer: Answer, ruleBook: RuleBook, style: LengthStyle): string {
+  const { margin, range } = marginOf(answer, ruleBook, style);
+  return `${margin}${range ? ` ${range}` : ''} ${verdictWord(answer.outcome.verdict)}`;
+}
+
 /** "+1½″ ± 1, tight, est." for lists and tables. */
 export function answerWords(answer: Answer | undefined, ruleBook: RuleBook, style: LengthStyle): string {
   if (!answer) return 'does not apply';

@@ -40,7 +40,8 @@ export function boardLayout(input: {
   const narrow = width < NARROW;
   const left = narrow ? 0.75 : 178;
   const right = narrow ? width - 0.75 : width - 326;
-  const curveTop = 30;
+  // Two lines of words stand over the curve where it is narrow.
+  const curveTop = narrow ? 46 : 30;
   const rowsTop = curveTop + (narrow ? 130 : 174);
   const rowHeight = narrow ? 62 : 52;
   const bandsTop = rowsTop + rows * rowHeight + 8;
@@ -116,3 +117,20 @@ export function tapeTicks(
     lower: ticks(min, max, { small: mm / 5, every: 5, label: (value) => `${Math.round(value)} mm` }),
   };
 }
+
+/** Width of a letter on the stick, on the safe side. */
+export const LETTER = 7.9;
+
+/** A name and the words behind it, as far as they have room: the words go first, then letters of the name. */
+export function fittingName(name: string, aside: string, room: number): { first: string; rest: string } {
+  const letters = Math.floor(room / LETTER);
+  if (name.length + 1 + aside.length <= letters) return { first: name, rest: aside };
+  return { first: name.length <= letters ? name : `${name.slice(0, Math.max(1, letters - 1))}…`, rest: '' };
+}
+
+/** Where verdicts stand over the laths of a narrow stick: all of the longest has room. */
+export const verdictsX = (width: number, letters: number): number =>
+  Math.max(0, Math.min(width * 0.52, width - MARK - letters * LETTER));
+
+/** The mark of a verdict and the gap behind it. */
+export const MARK = 31;

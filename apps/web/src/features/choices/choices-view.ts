@@ -9,6 +9,8 @@ export interface ChoicesView {
   check: (document: SetDocument) => FitSheet;
   /** Takes a document as one named step; absent when it cannot be changed here. */
   replace?: (document: SetDocument, step: string) => void;
+  /** A paper of the draft that the server makes; rejects with a sentence for a person. */
+  paper: (paper: string, asked: Readonly<Record<string, unknown>>) => Promise<void>;
   ruleBook: RuleBook;
   style: LengthStyle;
   /** `verdicts` for members who may not see what a verdict rests on. */

@@ -16,8 +16,10 @@ import { shortName } from '@/lib/short-name.ts';
 export interface Effects {
   better: string[];
   worse: string[];
-  /** Who still does not fit, and what is missing. */
+  /** Who still does not fit by the checks that the dimension moves, and what is missing. */
   lost: string[];
+  /** Of whom some such check is not known. */
+  unknown: string[];
   /** Other checks that keep what they say. */
   kept: number;
   /** Who falls to which verdict, for beside the button. */
@@ -36,15 +38,17 @@ interface Input {
   after: FitSheet;
   /** Rules that the page is about; their gains are said shortest. */
   ruleIds: ReadonlySet<string>;
+  /** Rules that the dimension moves, shown or not. */
+  moving: ReadonlySet<string>;
   ruleBook: RuleBook;
   style: LengthStyle;
 }
 
 /** Who gains and who loses between two sheets, by name. */
-export function effectsOf({ before, after, ruleIds, ruleBook, style }: Input): Effects {
+export function effectsOf({ before, after, ruleIds, moving, ruleBook, style }: Input): Effects {
   const names = new Map(before.rows.map(({ sitterId, name }) => [sitterId, shortName(name)]));
   const whoOf = ({ sitterId, marks }: CellChange) => names.get(sitterId ?? '') ?? joinWords(marks);
-  const checkOf = ({ ruleId }: CellChange) => ruleBook.rule(ruleId).columnName.toLowerCase();
+  const checkOf = (change: CellChange) => checkName(change, ruleBook);
   const changes = sheetChanges(before, after);
   const alone = ruleIds.size === 1;
   const brief = (change: CellChange) => alone && ruleIds.has(change.ruleId) && change.sitterId !== undefined;
@@ -66,7 +70,8 @@ export function effectsOf({ before, after, ruleIds, ruleBook, style }: Input): E
       ).map(({ change, who }) => who + inFull(change)),
     ],
     worse: gathered(losses, inFull, whoOf).map(({ change, who }) => who + inFull(change)),
-    lost: lostIn(after, ruleIds, ruleBook, style),
+    lost: lostIn(after, moving, ruleBook, style),
+    unknown: unknownIn(after, moving, ruleBook),
     kept:
       before.rows
         .flatMap(({ cells }) => cells)
@@ -82,7 +87,7 @@ export function effectsOf({ before, after, ruleIds, ruleBook, style }: Input): E
 const speaks = ({ outcome: { kind } }: FitSheet['piecesAndWays'][number]): boolean =>
   kind === 'verdict' || kind === 'clause';
 
-/** Who does not fit by the shown rules, and what is missing: "Hetty, 2⅛″ short". */
+/** Who does not fit by some rules, and what is missing: "Hetty, seat height: 2⅛″ short". */
 export function lostIn(
   sheet: FitSheet,
   ruleIds: ReadonlySet<string>,
@@ -92,10 +97,23 @@ export function lostIn(
   return sheet.rows.flatMap(({ placeId, name }) => {
     const answer = answerAt(sheet, placeId, ruleIds);
     return answer?.outcome.verdict === 'wontFit'
-      ? [`${shortName(name)}, ${shortBy(answer, ruleBook, style)}`]
+      ? [`${shortName(name)}, ${checkName(answer, ruleBook)}: ${shortBy(answer, ruleBook, style)}`]
       : [];
   });
 }
+
+/** Whose worst answer by some rules is that it is not known: "Wren, elbow to sill". */
+function unknownIn(sheet: FitSheet, ruleIds: ReadonlySet<string>, ruleBook: RuleBook): string[] {
+  return sheet.rows.flatMap(({ placeId, name }) => {
+    const answer = answerAt(sheet, placeId, ruleIds);
+    return answer?.outcome.verdict === 'notKnown'
+      ? [`${shortName(name)}, ${checkName(answer, ruleBook)}`]
+      : [];
+  });
+}
+
+const checkName = ({ ruleId }: Pick<CellChange, 'ruleId'>, ruleBook: RuleBook): string =>
+  ruleBook.rule(ruleId).columnName.toLowerCase();
 
 /** Changes that are said in one line, with everybody whom they touch. */
 function gathered(

@@ -4,7 +4,8 @@ import { CROWDS, type CrowdChoice, type CrowdOption } from '@/lib/crowd/crowds.t
 import { useOwnCrowd, useOwnCrowds } from '@/lib/crowd/own-crowds.ts';
 
 export interface AskedCrowd {
-  /** Populations to choose from, the workshop's own among them. */
+  /** The workshop's own surveys, and every population to choose from. */
+  own: readonly CrowdOption[];
   options: readonly CrowdOption[];
   /** Whom to ask; `undefined` while a survey of the workshop's own is fetched. */
   request: CrowdRequest | undefined;
@@ -13,12 +14,12 @@ export interface AskedCrowd {
 
 /** The people of the address, with the statistics of a survey of the workshop's own. */
 export function useCrowd({ populationId, women }: CrowdChoice): AskedCrowd {
-  const owned = useOwnCrowds();
+  const surveys = useOwnCrowds();
   const { own, isPending, error } = useOwnCrowd(populationId);
-  const options = useMemo(() => [...CROWDS, ...owned], [owned]);
+  const options = useMemo(() => [...surveys, ...CROWDS], [surveys]);
   const request = useMemo(
     () => (isPending || error ? undefined : { populationId, women, ...(own ? { own } : {}) }),
     [populationId, women, own, isPending, error],
   );
-  return { options, request, fault: error?.message };
+  return { own: surveys, options, request, fault: error?.message };
 }

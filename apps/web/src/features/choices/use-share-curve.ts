@@ -80,3 +80,14 @@ export function shareAt(points: readonly CurveShare[], value: number): number | 
   if (b.value === a.value || Math.abs(b.value - value) < 1e-6) return b.fits;
   return a.fits + ((value - a.value) / (b.value - a.value)) * (b.fits - a.fits);
 }
+
+/** Shares closer than this are said to be the same. */
+const SAME = 0.005;
+
+/** "25 more in 100", never "fewer people, 25 in 100". */
+export function moreWords(from: number | undefined, to: number | undefined, than = ''): string | undefined {
+  if (from === undefined || to === undefined) return undefined;
+  const by = Math.round(to * 100) - Math.round(from * 100);
+  if (Math.abs(to - from) < SAME || by === 0) return `about as many${than.replace(/^ than/, ' as')}`;
+  return `about ${Math.abs(by)} ${by > 0 ? 'more' : 'fewer'} in 100${than}`;
+}

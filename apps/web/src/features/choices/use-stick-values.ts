@@ -1,9 +1,9 @@
-import { orderedRows, type StickRow, type StoryStick } from '@settlewright/geometry';
-import { useCallback, useMemo, useState } from 'react';
+import { orderedRows, type SetDocument, type StickRow, type StoryStick } from '@settlewright/geometry';
+import { useCallback, useEffect, useMemo, useRef, useState } from 'react';
 import { exactValue } from '@/lib/dimension-words.ts';
 import { answerAt, type Answer } from './answers.ts';
 import { useChoices } from './choices-view.ts';
-import { bestValue } from './suggestion.ts';
+import { bestOffer, type Offer } from './offer.ts';
 import type { TriedValues } from './tried-values.ts';
 import { EVERY_CHECK } from './use-stick-address.ts';
 
@@ -12,8 +12,13 @@ export interface StickValues {
   ruleIds: ReadonlySet<string>;
   /** Where the set stands. */
   present: number;
-  /** Where the plumb line hangs: the present value, or the one under the hand. */
+  /** The value under the hand, not written yet; absent where the set stands. */
+  trying: number | undefined;
+  /** Where the plumb line hangs. */
   shown: number;
+  /** What serves most by every check; its value may be the present one. */
+  offer: Offer | undefined;
+  /** The offered value where it is another one than the present. */
   suggested: number | undefined;
   answersAt: (value: number) => (Answer | undefined)[];
   move: (value: number) => void;
@@ -22,21 +27,24 @@ export interface StickValues {
   leave: () => void;
 }
 
+/** Values closer than this are one. */
+const SAME = 1e-6;
+
 /** The values of a stick, and the one under the hand. */
 export function useStickValues(tried: TriedValues, stick: StoryStick, rule: string): StickValues {
   const { document, check, replace, style } = useChoices();
   const { dimension } = tried;
   const present = tried.valueOf(document) ?? dimension.value;
-  const [trial, setTrial] = useState<number>();
+  // A value is tried on one set: when that changes otherwise, as by undo, the trial is over.
+  const [trial, setTrial] = useState<{ value: number; on: SetDocument }>();
+  const held = trial?.on === document ? trial.value : present;
+  const trying = Math.abs(held - present) < SAME ? undefined : held;
   const rows = useMemo(() => orderedRows(stick.rows), [stick]);
   const ruleIds = useMemo<ReadonlySet<string>>(
     () => new Set(rule === EVERY_CHECK ? stick.ruleIds : [rule]),
     [stick, rule],
   );
-  const suggested = useMemo(() => {
-    const best = bestValue(stick, present);
-    return best && Math.abs(best.value - present) > 1e-6 ? best.value : undefined;
-  }, [stick, present]);
+  const offer = useMemo(() => bestOffer(stick, present), [stick, present]);
   const answersAt = useCallback(
     (value: number) => {
       const set = dimension.at(value);
@@ -45,24 +53,29 @@ export function useStickValues(tried: TriedValues, stick: StoryStick, rule: stri
     },
     [dimension, check, rows, ruleIds],
   );
-  const shown = trial ?? present;
+  const write = useRef(() => undefined as void);
+  useEffect(() => {
+    write.current = () => {
+      setTrial(undefined);
+      const set = trying === undefined ? undefined : dimension.at(trying);
+      if (!replace || !set || trying === undefined) return;
+      const show = (value: number) => exactValue(value, dimension.unit, style);
+      replace(set, `${dimension.label} ${show(present)} to ${show(trying)}`);
+    };
+  });
   return {
     rows,
     ruleIds,
     present,
-    shown,
-    suggested,
+    trying,
+    shown: trying ?? present,
+    offer,
+    suggested: offer && Math.abs(offer.value - present) > SAME ? offer.value : undefined,
     answersAt,
     move: (value) => {
-      if (dimension.at(value)) setTrial(value);
+      if (dimension.at(value)) setTrial({ value, on: document });
     },
-    settle: () => {
-      setTrial(undefined);
-      const set = dimension.at(shown);
-      if (!replace || !set || Math.abs(shown - present) < 1e-6) return;
-      const show = (value: number) => exactValue(value, dimension.unit, style);
-      replace(set, `${dimension.label} ${show(present)} to ${show(shown)}`);
-    },
-    leave: () => setTrial(undefined),
+    settle: useCallback(() => write.current(), []),
+    leave: useCallback(() => setTrial(undefined), []),
   };
 }

@@ -131,7 +131,7 @@ export function blameWords(blame: Blame, { sheet, ruleBook, show }: Ground): Bla
     blame.left === 0
       ? 'nothing would be missed'
       : `${blame.left} ${blame.left === 1 ? 'check' : 'checks'} would still be missed`;
-  const rails = footRails(sheet, show);
+  const rails = railWords(sheet, show);
   if (blame.kind === 'rule') {
     const who = sheet.rows.filter((row) => shortCells(row).some(({ ruleId }) => ruleId === blame.id));
     const names = joinWords(who.map(({ name }) => shortName(name)));
@@ -158,19 +158,12 @@ export function blameWords(blame: Blame, { sheet, ruleBook, show }: Ground): Bla
   };
 }
 
-const SEAT_HEIGHT = 'SEAT-02';
-
-/** Whose feet a rail would bring in: the seat is too high for them by so much. */
-function footRails({ rows }: FitSheet, show: (mm: number) => string): string[] {
-  return rows.flatMap(({ name, cells }) => {
-    const outcome = cells.find(({ ruleId }) => ruleId === SEAT_HEIGHT)?.outcome;
-    if (outcome?.kind !== 'verdict' || outcome.verdict !== 'wontFit') return [];
-    const { value, fail, pass } = outcome;
-    if (fail.upper === undefined || value <= fail.upper) return [];
-    return [
-      `Give ${shortName(name)} a foot rail ${show(value - (pass.upper ?? fail.upper))} high: the seat is too high by that.`,
-    ];
-  });
+/** "Give Hetty a foot rail 54 mm high": to whom the seat is too high. */
+function railWords(sheet: FitSheet, show: (mm: number) => string): string[] {
+  return footRails(sheet).map(
+    ({ name, fitsMm }) =>
+      `Give ${shortName(name)} a foot rail ${show(fitsMm)} high: the seat is too high by that.`,
+  );
 }
 
 /** What the known differences will say of the choice not taken. */

@@ -1,17 +1,19 @@
 import type { Dimension } from '@settlewright/geometry';
 import { Button } from '@/components/button.tsx';
+import { classNames } from '@/components/class-names.ts';
 import { Measure } from '@/components/measure.tsx';
 import { aboutInHundred, exactValue, joinWords } from '@/lib/dimension-words.ts';
-import type { BestPair, CastMap } from '@settlewright/geometry';
+import type { CastMap } from '@settlewright/geometry';
 import { useChoices } from '../choices-view.ts';
+import type { PricedPair } from '../pair-costs.ts';
 import { shortName } from '@/lib/short-name.ts';
 
 interface BestPairsProps {
-  pairs: readonly BestPair[];
+  pairs: readonly PricedPair[];
   map: CastMap;
   first: Dimension;
   second: Dimension;
-  onTake: ((pair: BestPair) => void) | undefined;
+  onTake: ((pair: PricedPair) => void) | undefined;
 }
 
 const CELL = 'border-b border-rule py-2 pr-5 text-left align-baseline';
@@ -57,6 +59,10 @@ export function BestPairs({ pairs, map, first, second, onTake }: BestPairsProps)
                   {pair.served === people ? `all ${people} served` : `${pair.served} of ${people} served`}
                   {lost.length > 0 && `; ${joinWords(lost)} won’t fit`}
                   {unknown.length > 0 && `; ${joinWords(unknown)} not known`}
+                  <span className={classNames('block', pair.costs.length > 0 ? 'text-wont' : 'text-ink-2')}>
+                    {pair.costs.length > 0 ? `Turns away ${pair.costs.join('; ')}` : 'Turns nobody away'}
+                    {pair.lesser > 0 && `. ${pair.lesser} more turn worse`}.
+                  </span>
                 </td>
                 <td className={CELL}>
                   {pair.share === undefined ? 'not counted yet' : aboutInHundred(pair.share)}
@@ -80,7 +86,7 @@ export function BestPairs({ pairs, map, first, second, onTake }: BestPairsProps)
   );
 }
 
-function namesAt({ across, up, regions }: CastMap, pair: BestPair, state: 'lost' | 'notKnown'): string[] {
+function namesAt({ across, up, regions }: CastMap, pair: PricedPair, state: 'lost' | 'notKnown'): string[] {
   const [i, j] = [up.indexOf(pair.up), across.indexOf(pair.across)];
   return regions.filter(({ states }) => states[i]?.[j] === state).map(({ name }) => shortName(name));
 }

@@ -1,7 +1,7 @@
 import type { StickRow, StoryStick } from '@settlewright/geometry';
 import { memo } from 'react';
 import { SitterDot } from '@/components/sitter-dot.tsx';
-import { BAND_HEIGHT, tapeTicks, type BoardLayout } from '../board-layout.ts';
+import { BAND_HEIGHT, fittingName, tapeTicks, type BoardLayout } from '../board-layout.ts';
 import { useChoices } from '../choices-view.ts';
 import type { StickBand } from '@settlewright/geometry';
 import type { ShareCurves } from '../use-share-curve.ts';
@@ -17,6 +17,8 @@ interface GroundProps {
   rows: readonly StickRow[];
   bands: readonly StickBand[];
   curves: ShareCurves | undefined;
+  /** How often the verdict of each row has turned since the stick was shown. */
+  turns: readonly number[];
 }
 
 /** Middle of a row's lath. */
@@ -24,7 +26,14 @@ export const lathY = ({ rowsTop, rowHeight, narrow }: BoardLayout, row: number):
   rowsTop + row * rowHeight + (narrow ? 42 : rowHeight / 2);
 
 /** What does not move with the plumb line. */
-export const BoardGround = memo(function BoardGround({ layout, stick, rows, bands, curves }: GroundProps) {
+export const BoardGround = memo(function BoardGround({
+  layout,
+  stick,
+  rows,
+  bands,
+  curves,
+  turns,
+}: GroundProps) {
   const { left, right, rowsTop, rowHeight, bandsTop, narrow, width, x } = layout;
   const { unit } = stick.dimension;
   const marks = tapeTicks(unit, layout).upper.filter(({ size }) => size === 'long');
@@ -38,7 +47,9 @@ export const BoardGround = memo(function BoardGround({ layout, stick, rows, band
       <ShareCurve points={curves?.points} joint={curves?.joint} layout={layout} />
       {rows.map((row, n) => (
         <g key={row.placeId}>
-          <Lath row={row} x={x} y={lathY(layout, n)} />
+          <g key={turns[n]} className={turns[n] ? 'lath-settles' : undefined}>
+            <Lath row={row} x={x} y={lathY(layout, n)} />
+          </g>
           <path
             d={`M${narrow ? left : 0} ${rowsTop + (n + 1) * rowHeight}H${width}`}
             stroke="var(--color-rule)"
@@ -47,7 +58,8 @@ export const BoardGround = memo(function BoardGround({ layout, stick, rows, band
         </g>
       ))}
       {bands.map((band, n) => {
-        const y = bandsTop + n * BAND_HEIGHT + BAND_HEIGHT / 2;
+        // Where it is narrow the name stands over its range.
+        const y = bandsTop + n * BAND_HEIGHT + (narrow ? BAND_HEIGHT - 6 : BAND_HEIGHT / 2);
         return (
           <g key={n}>
             <path
@@ -62,7 +74,7 @@ export const BoardGround = memo(function BoardGround({ layout, stick, rows, band
             />
             <text
               x={narrow ? left : 0}
-              y={y + (narrow ? -3 : 4)}
+              y={y + (narrow ? -10 : 4)}
               fontSize={narrow ? 11.5 : 13}
               fill="var(--color-ink-2)"
             >
@@ -78,12 +90,19 @@ export const BoardGround = memo(function BoardGround({ layout, stick, rows, band
 });
 
 /** Names beside the laths, or over them where it is narrow. */
-export const BoardNames = memo(function BoardNames({ layout, rows }: Pick<GroundProps, 'layout' | 'rows'>) {
+export const BoardNames = memo(function BoardNames({
+  layout,
+  rows,
+  room,
+}: Pick<GroundProps, 'layout' | 'rows'> & {
+  /** Pixels from the start of a name to what stands behind it. */
+  room: number;
+}) {
   const { aside, colourOf } = useChoices();
   const { rowsTop, rowHeight, narrow, width } = layout;
   return rows.map(({ sitterId, placeId, name }, n) => {
     const top = rowsTop + n * rowHeight;
-    const words = aside(sitterId);
+    const { first, rest } = fittingName(shortName(name), aside(sitterId), room);
     const y = narrow ? top + 20 : top + rowHeight / 2 + 5;
     return (
       <g key={placeId}>
@@ -94,9 +113,9 @@ export const BoardNames = memo(function BoardNames({ layout, rows }: Pick<Ground
           </g>
         )}
         <text x={narrow ? 0 : 24} y={y} fontSize={narrow ? 14 : 15} fontWeight={500} fill="var(--color-ink)">
-          {shortName(name)}{' '}
+          {first}{' '}
           <tspan fontWeight={400} fill="var(--color-ink-2)">
-            <SvgWords text={words} />
+            <SvgWords text={rest} />
           </tspan>
         </text>
       </g>

@@ -1,8 +1,7 @@
 import type { StickRow } from '@settlewright/geometry';
-import type { ReactNode } from 'react';
 import { exactValue } from '@/lib/dimension-words.ts';
 import type { Answer } from '../answers.ts';
-import type { BoardLayout } from '../board-layout.ts';
+import { LETTER, type BoardLayout } from '../board-layout.ts';
 import { useChoices } from '../choices-view.ts';
 import { shareAt, type ShareCurves } from '../use-share-curve.ts';
 import { inHundred } from '../words.ts';
@@ -16,8 +15,8 @@ interface LinesProps {
   rows: readonly StickRow[];
   answers: readonly (Answer | undefined)[];
   shown: number;
-  /** The shown value is the one that is built now. */
-  settled: boolean;
+  /** Where the set stands while another value is tried. */
+  start: number | undefined;
   suggested: number | undefined;
   curves: ShareCurves | undefined;
 }
@@ -28,10 +27,11 @@ function missing({ tight }: StickRow, value: number): number | undefined {
   return ends.sort((a, b) => Math.abs(a - value) - Math.abs(b - value))[0];
 }
 
-/** The plumb line at the shown value, the chalk line at the suggestion, and what is missing. */
-export function BoardLines({ layout, unit, rows, answers, shown, settled, suggested, curves }: LinesProps) {
+/** The plumb line at the shown value, the chalk line at the suggestion, where the set stands, and what is missing. */
+export function BoardLines({ layout, unit, rows, answers, shown, start, suggested, curves }: LinesProps) {
   const { style } = useChoices();
   const { x, tapeBottom } = layout;
+  const head = linesTop(layout);
   const at = x(shown);
   const share = curves && shareAt(curves.points, shown);
   const wanted = suggested !== undefined && Math.abs(suggested - shown) > 1e-6 ? suggested : undefined;
@@ -55,7 +55,7 @@ export function BoardLines({ layout, unit, rows, answers, shown, settled, sugges
       {wanted !== undefined && (
         <>
           <path
-            d={`M${x(wanted)} 24V${tapeBottom}`}
+            d={`M${x(wanted)} ${head - (layout.narrow ? LINE : 0)}V${tapeBottom}`}
             stroke="var(--color-chalk)"
             strokeWidth={2.2}
             strokeDasharray="2.5 3"
@@ -70,12 +70,18 @@ export function BoardLines({ layout, unit, rows, answers, shown, settled, sugges
               strokeWidth={2}
             />
           )}
-          <LineWords x={x(wanted)} before={left} layout={layout} colour="var(--color-chalk)">
-            <SvgWords text={`${exactValue(wanted, unit, style)}${counted(wantedShare)}`} />
-          </LineWords>
+          <LineWords
+            x={x(wanted)}
+            before={left}
+            layout={layout}
+            colour="var(--color-chalk)"
+            line={0}
+            text={`${exactValue(wanted, unit, style)}${counted(wantedShare)}`}
+          />
         </>
       )}
-      <path d={`M${at} 24V${tapeBottom + 4}`} stroke="var(--color-ink)" strokeWidth={1.8} />
+      {start !== undefined && <StartMark layout={layout} unit={unit} start={start} shown={shown} />}
+      <path d={`M${at} ${head}V${tapeBottom + 4}`} stroke="var(--color-ink)" strokeWidth={1.8} />
       {share !== undefined && (
         <circle
           cx={at}
@@ -92,41 +98,89 @@ export function BoardLines({ layout, unit, rows, answers, shown, settled, sugges
         stroke="var(--color-pen)"
         strokeWidth={1.4}
       />
-      <LineWords x={at} before={!left} layout={layout} colour="var(--color-ink)">
-        <SvgWords text={`${exactValue(shown, unit, style)}${settled ? ' now' : ''}${counted(share)}`} />
-      </LineWords>
+      <LineWords
+        x={at}
+        before={!left}
+        layout={layout}
+        colour="var(--color-ink)"
+        line={1}
+        text={`${exactValue(shown, unit, style)}${start === undefined ? ' now' : ''}${counted(share)}`}
+      />
     </g>
   );
 }
 
-const WORDS_ROOM = 150;
-
-/** Words at the head of a line, on the side where the other line is not, inside the drawing. */
-function LineWords({
-  x,
-  before,
+/** Where the set stands while another value is tried: a dashed line, and its value under the tape. */
+function StartMark({
   layout,
-  colour,
-  children,
-}: {
+  unit,
+  start,
+  shown,
+}: Pick<LinesProps, 'layout' | 'unit' | 'shown'> & { start: number }) {
+  const { style } = useChoices();
+  const { x, rowsTop, tapeBottom } = layout;
+  const at = x(start);
+  const before = start < shown;
+  return (
+    <g>
+      <path
+        d={`M${at} ${rowsTop}V${tapeBottom + 8}`}
+        stroke="var(--color-ink-2)"
+        strokeWidth={1.4}
+        strokeDasharray="7 4"
+      />
+      <path d={`M${at - 4} ${tapeBottom + 8}h8`} stroke="var(--color-ink-2)" strokeWidth={1.4} />
+      <Held
+        x={before ? at - 8 : at + 8}
+        y={tapeBottom + 24}
+        before={before}
+        layout={layout}
+        colour="var(--color-ink-2)"
+        text={`${exactValue(start, unit, style)} now`}
+      />
+    </g>
+  );
+}
+
+const LINE = 17;
+const FIRST_LINE = 15;
+
+/** Top of the plumb line: under the words at the head, which take two lines where it is narrow. */
+const linesTop = ({ narrow }: BoardLayout): number => FIRST_LINE + 9 + (narrow ? LINE : 0);
+
+interface WordsProps {
   x: number;
   before: boolean;
   layout: BoardLayout;
   colour: string;
-  children: ReactNode;
-}) {
-  const edge = layout.narrow ? layout.width : layout.width - 40;
-  const atLeft = before ? x - WORDS_ROOM > 0 : x + WORDS_ROOM > edge;
+  text: string;
+}
+
+/** Words at the head of a line, on the side where the other line is not; one under the other where it is narrow. */
+function LineWords({ x, before, line, ...words }: WordsProps & { line: 0 | 1 }) {
+  const y = FIRST_LINE + (words.layout.narrow ? line * LINE : 0);
+  return <Held x={before ? x - 6 : x + 6} y={y} before={before} {...words} />;
+}
+
+/** Words beside a line, moved along where they would leave the drawing. */
+function Held({ x, y, before, layout, colour, text }: WordsProps & { y: number }) {
+  const wide = text.length * LETTER;
+  const most = layout.narrow ? layout.width : layout.width - 40;
+  const from = Math.max(0, Math.min(before ? x - wide : x, most - wide));
   return (
     <text
-      x={atLeft ? x - 6 : x + 6}
-      y={15}
-      textAnchor={atLeft ? 'end' : 'start'}
+      x={before ? from + wide : from}
+      y={y}
+      textAnchor={before ? 'end' : 'start'}
       fontSize={14}
       fontWeight={600}
       fill={colour}
+      stroke="var(--color-paper)"
+      strokeWidth={4}
+      strokeLinejoin="round"
+      paintOrder="stroke"
     >
-      {children}
+      <SvgWords text={text} />
     </text>
   );
 }

@@ -1,6 +1,6 @@
 import { GapMark, verdictWord } from '@/components/verdict.tsx';
 import { marginOf, type Answer } from '../answers.ts';
-import type { BoardLayout } from '../board-layout.ts';
+import { MARK, type BoardLayout } from '../board-layout.ts';
 import { useChoices } from '../choices-view.ts';
 import { SvgWords } from './svg-words.tsx';
 
@@ -35,7 +35,7 @@ export function BoardVerdicts({ layout, x, answers }: VerdictsProps) {
           <GapMark verdict={verdict} estimated={estimated} />
         </g>
         {narrow ? (
-          <text x={x + 31} y={y + 5} fontSize={14} fontWeight={500}>
+          <text x={x + MARK} y={y + 5} fontSize={14} fontWeight={500}>
             <SvgWords text={amount} /> {word}
           </text>
         ) : (

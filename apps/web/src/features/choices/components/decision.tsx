@@ -1,15 +1,23 @@
 import { type StoryStick, type Dimension } from '@settlewright/geometry';
-import { memo, useMemo } from 'react';
+import { memo, useMemo, useState, type KeyboardEvent } from 'react';
+import { Button } from '@/components/button.tsx';
 import { Measure } from '@/components/measure.tsx';
+import { footRails } from '@/lib/foot-rails.ts';
 import { withKnownDifference } from '@/lib/known-difference.ts';
 import { useSession } from '@/lib/session.ts';
+import { shortName } from '@/lib/short-name.ts';
 import { exactValue, joinWords, markWords } from '@/lib/dimension-words.ts';
 import { useChoices } from '../choices-view.ts';
 import { effectsOf, lostIn } from '../effects.ts';
+import type { Offer } from '../offer.ts';
+import { railHeights, servesWords } from '../offer-words.ts';
 import type { TriedValues } from '../tried-values.ts';
-import { shareAt, type ShareCurves } from '../use-share-curve.ts';
+import { moreWords, shareAt, type ShareCurves } from '../use-share-curve.ts';
 import { movingWords } from '../words.ts';
 import { KeepChoice } from './keep-choice.tsx';
+import { goesBack, TRIAL_MARK } from './plumb-slider.tsx';
+import { NothingBetter } from './nothing-better.tsx';
+import { RailOffer } from './rail-offer.tsx';
 import { TakeChoice } from './take-choice.tsx';
 
 interface DecisionProps {
@@ -17,19 +25,15 @@ interface DecisionProps {
   stick: StoryStick;
   ruleIds: ReadonlySet<string>;
   present: number;
+  /** The value under the hand, once it rests there. */
+  trying: number | undefined;
+  /** Absent when nobody's verdict follows the dimension. */
+  offer: Offer | undefined;
   /** Absent when the present value serves as many as any. */
   suggested: number | undefined;
   curves: ShareCurves | undefined;
-}
-
-const SAME = 0.005;
-
-/** "25 more in 100", never "fewer people, 25 in 100". */
-function publicWords(from: number | undefined, to: number | undefined, than = ''): string | undefined {
-  if (from === undefined || to === undefined) return undefined;
-  const by = Math.round(to * 100) - Math.round(from * 100);
-  if (Math.abs(to - from) < SAME || by === 0) return `about as many${than.replace(/^ than/, ' as')}`;
-  return `about ${Math.abs(by)} ${by > 0 ? 'more' : 'fewer'} in 100${than}`;
+  onTake: () => void;
+  onLeave: () => void;
 }
 
 const alongWords = ({ tableMarks }: Dimension): string =>
@@ -37,85 +41,117 @@ const alongWords = ({ tableMarks }: Dimension): string =>
     ? ''
     : `${tableMarks.length === 1 ? 'table' : 'tables'} ${markWords(tableMarks)} along with it`;
 
-/** The choice in plain words: take the suggestion, or keep what is and say so. */
+/** The choice in plain words: take another value, give somebody a rail, or keep what is and say why. */
 export const Decision = memo(function Decision({
   tried,
   stick,
   ruleIds,
   present,
+  trying,
+  offer,
   suggested,
   curves,
+  onTake,
+  onLeave,
 }: DecisionProps) {
   const { document, check, replace, ruleBook, style } = useChoices();
   const by = useSession((state) => state.user?.name);
+  const [railNoted, setRailNoted] = useState(false);
   const { dimension } = tried;
   const show = (value: number) => exactValue(value, dimension.unit, style);
   const now = show(present);
-  const next = suggested === undefined ? undefined : dimension.at(suggested);
+  const target = trying ?? suggested;
+  const next = target === undefined ? undefined : dimension.at(target);
+  const moving = useMemo(() => new Set(stick.ruleIds), [stick]);
   const effects = useMemo(
-    () => next && effectsOf({ before: check(document), after: check(next), ruleIds, ruleBook, style }),
-    [document, next, check, ruleIds, ruleBook, style],
+    () =>
+      next && effectsOf({ before: check(document), after: check(next), ruleIds, moving, ruleBook, style }),
+    [document, next, check, ruleIds, moving, ruleBook, style],
   );
   const lost = useMemo(
-    () => lostIn(check(document), ruleIds, ruleBook, style),
-    [document, check, ruleIds, ruleBook, style],
+    () => lostIn(check(document), moving, ruleBook, style),
+    [document, check, moving, ruleBook, style],
+  );
+  const rails = useMemo(
+    () => (moving.has(dimension.ruleId) && dimension.unit === 'mm' ? footRails(check(document)) : []),
+    [document, check, moving, dimension],
   );
   const share = (value: number) => curves && shareAt(curves.points, value);
-  const served = suggested === undefined ? undefined : share(suggested);
-  const losing =
-    lost.length === 0 ? '' : `; ${joinWords(lost.map((line) => line.replace(/, .*$/, '')))} won’t fit`;
-  const difference = `${dimension.label} kept at ${now} (${movingWords(dimension)})${losing}.`;
+  const served = target === undefined ? undefined : share(target);
+  const names = (list: readonly string[]) => joinWords(list.map((line) => line.replace(/, .*$/, '')));
+  const losing = lost.length === 0 ? '' : `; ${names(lost)} won’t fit`;
+  const railing =
+    railNoted && rails.length > 0
+      ? `; with a foot rail for ${joinWords(rails.map((rail) => `${shortName(rail.name)} (${railHeights(rail, tried.step, style)})`))}`
+      : '';
+  const difference = `${dimension.label} kept at ${now} (${movingWords(dimension)})${losing}${railing}.`;
   const keep = (reason: string) => {
     replace?.(
       withKnownDifference(document, { text: difference, reason, by }),
       `${dimension.label} kept at ${now}`,
     );
   };
+  const take = () => {
+    if (trying !== undefined) onTake();
+    else if (next && target !== undefined) replace?.(next, `${dimension.label} ${now} to ${show(target)}`);
+  };
+  const back = (event: KeyboardEvent) => {
+    if (trying === undefined || !goesBack(event)) return;
+    event.preventDefault();
+    onLeave();
+  };
   return (
     <aside aria-label="The choice" className="min-w-0 desk:row-span-2">
-      <p className="mb-3 flex items-baseline gap-3 text-4xl font-light tracking-hero">
+      <p className="mb-3 flex flex-wrap items-baseline gap-x-3 text-4xl font-light tracking-hero">
         <Measure text={now} />
-        {suggested !== undefined && (
-          <>
+        {target !== undefined && (
+          <span className="flex items-baseline gap-3">
             <span className="text-base font-normal tracking-normal text-ink-3">to</span>
             <span className="font-normal text-chalk">
-              <Measure text={show(suggested)} />
+              <Measure text={show(target)} />
             </span>
-          </>
+          </span>
         )}
       </p>
-      {suggested !== undefined && next && effects ? (
-        <TakeChoice
-          value={show(suggested)}
-          along={alongWords(dimension)}
-          effects={effects}
-          publicWords={publicWords(share(present), served)}
-          onTake={replace && (() => replace(next, `${dimension.label} ${now} to ${show(suggested)}`))}
-        />
-      ) : (
-        <section className="ruled pt-3 pb-4">
-          <h2 className="mb-1 text-lg font-semibold">
-            {stick.rows.length === 0 ? 'Nobody’s verdict follows it' : <>No other value serves more</>}
-          </h2>
-          <p className="text-sm text-ink-2">
-            {stick.rows.length === 0 ? (
-              'No check of the people seated here reads this number by the rule that is shown.'
-            ) : (
-              <>
-                <Measure text={now} /> serves as many of the people seated here as any value between the ends
-                of the tape.
-              </>
+      {target !== undefined && next && effects ? (
+        // Escape in here ends the trial, as it does on the line.
+        // eslint-disable-next-line jsx-a11y/no-static-element-interactions
+        <div onKeyDown={back} {...(trying !== undefined && TRIAL_MARK)}>
+          <TakeChoice
+            value={show(target)}
+            along={alongWords(dimension)}
+            serves={trying === undefined && offer ? servesWords(offer, stick.sitters.length) : undefined}
+            effects={effects}
+            publicWords={moreWords(share(present), served)}
+            onTake={replace && take}
+          >
+            {trying !== undefined && (
+              <Button onMouseDown={(event) => event.preventDefault()} onClick={onLeave}>
+                <span>
+                  Back to <Measure text={now} />
+                </span>
+              </Button>
             )}
-          </p>
-        </section>
+          </TakeChoice>
+        </div>
+      ) : (
+        <NothingBetter now={now} stick={stick} present={present} />
+      )}
+      {rails.length > 0 && (
+        <RailOffer
+          rails={rails.map((rail) => ({
+            name: shortName(rail.name),
+            says: railHeights(rail, tried.step, style),
+          }))}
+          isNoted={railNoted}
+          onNote={replace && setRailNoted}
+        />
       )}
       <KeepChoice
         value={now}
         lost={lost}
         publicWords={
-          suggested === undefined
-            ? undefined
-            : publicWords(served, share(present), ` than at ${show(suggested)}`)
+          target === undefined ? undefined : moreWords(served, share(present), ` than at ${show(target)}`)
         }
         difference={difference}
         onKeep={replace && keep}

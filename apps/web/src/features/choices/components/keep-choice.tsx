@@ -1,7 +1,7 @@
-import { useState } from 'react';
+import { useRef, useState } from 'react';
 import { Button } from '@/components/button.tsx';
 import { Measure } from '@/components/measure.tsx';
-import { TextArea } from '@/components/text-field.tsx';
+import { REASON_MISSING, ReasonField } from '@/components/reason-field.tsx';
 import { ChoiceLines } from './choice-lines.tsx';
 
 interface KeepChoiceProps {
@@ -13,10 +13,13 @@ interface KeepChoiceProps {
   onKeep: ((reason: string) => void) | undefined;
 }
 
-/** Keep the present value for the look, and say so in the known differences. */
+/** Keep the present value for the look, and say in the known differences why. */
 export function KeepChoice({ value, lost, publicWords, difference, onKeep }: KeepChoiceProps) {
   const [reason, setReason] = useState('');
+  const [asked, setAsked] = useState(false);
   const [kept, setKept] = useState<string>();
+  const field = useRef<HTMLTextAreaElement>(null);
+  const isMissing = reason.trim() === '';
   return (
     <section aria-labelledby="keep-heading" className="border-t border-rule pt-3">
       <h2 id="keep-heading" className="mb-1 text-lg font-semibold">
@@ -24,27 +27,31 @@ export function KeepChoice({ value, lost, publicWords, difference, onKeep }: Kee
       </h2>
       <ChoiceLines
         lines={[
-          ['Lost', lost.length > 0 ? [lost.join('; ')] : ['nobody'], lost.length > 0],
+          ['Lost', lost.length > 0 ? lost : ['nobody'], lost.length > 0],
           ['Public', publicWords ? [publicWords] : []],
         ]}
       />
       {onKeep && (
         <form
+          noValidate
           onSubmit={(event) => {
             event.preventDefault();
+            setAsked(isMissing);
+            if (isMissing) {
+              field.current?.focus();
+              return;
+            }
             onKeep(reason.trim());
             setKept(difference);
             setReason('');
           }}
         >
-          <TextArea
-            label="Note for the known differences"
-            description={`Stands behind “${difference}”, with your name and today’s date.`}
-            placeholder="For example: the photograph shows it, and the camera sees it."
+          <ReasonField
+            ref={field}
+            behind={difference}
             value={reason}
-            maxLength={1000}
-            rows={2}
-            onChange={(event) => setReason(event.target.value)}
+            error={asked && isMissing ? REASON_MISSING : undefined}
+            onChange={setReason}
           />
           <div className="mt-3 flex flex-wrap items-center gap-x-4 gap-y-2">
             <Button type="submit">

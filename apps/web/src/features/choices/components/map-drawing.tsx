@@ -1,11 +1,11 @@
 import type { Dimension } from '@settlewright/geometry';
 import { memo } from 'react';
-import { tapeTicks } from '../board-layout.ts';
-import type { CastMap, MapRegion } from '@settlewright/geometry';
+import type { CastMap } from '@settlewright/geometry';
 import { useChoices } from '../choices-view.ts';
 import { contours } from '../contours.ts';
+import { mapNames, outlineOf } from '../map-names.ts';
 import { inHundred } from '../words.ts';
-import { shortName } from '@/lib/short-name.ts';
+import { MapAxis } from './map-axis.tsx';
 
 interface MapDrawingProps {
   map: CastMap;
@@ -20,7 +20,6 @@ const LEFT = 52;
 const TOP = 18;
 const FOOT = 46;
 const LINES = [0.25, 0.5, 0.75];
-const APART = 44;
 
 /** Shaded by how many of the public fit; each sitter's region is outlined and named. */
 export const MapDrawing = memo(function MapDrawing({
@@ -43,15 +42,31 @@ export const MapDrawing = memo(function MapDrawing({
   ];
   const x = (value: number) => LEFT + ((value - minX) / (maxX - minX)) * (right - LEFT);
   const y = (value: number) => bottom - ((value - minY) / (maxY - minY)) * (bottom - TOP);
-  const path = (grid: readonly (readonly number[])[], level: number) =>
-    contours(grid, level)
+  const place = (along: number, high: number): [number, number] => [
+    LEFT + along * cellX,
+    bottom - high * cellY,
+  ];
+  const pathOf = (lines: ReturnType<typeof contours>) =>
+    lines
       .map(
-        ([[a, b], [c, d]]) =>
-          `M${px(LEFT + a * cellX)} ${px(bottom - b * cellY)}L${px(LEFT + c * cellX)} ${px(bottom - d * cellY)}`,
+        ([from, to]) =>
+          `M${place(...from)
+            .map(px)
+            .join(' ')}L${place(...to)
+            .map(px)
+            .join(' ')}`,
       )
       .join('');
   const known = shares?.map((row) => row.map((share) => share ?? NaN));
-  const named = placeNames(regions, (i, j) => [LEFT + j * cellX, bottom - i * cellY], { right, bottom });
+  const frame = { left: LEFT, right, top: TOP, bottom };
+  const written = [
+    [LEFT, TOP],
+    [right, TOP],
+    [LEFT, bottom],
+    [right, bottom],
+    [x(present.across), y(present.up)],
+  ] satisfies [number, number][];
+  const named = mapNames(regions, place, frame, written);
   const corners = [
     [0, 0, 'start', -6],
     [0, across.length - 1, 'end', -6],
@@ -89,7 +104,7 @@ export const MapDrawing = memo(function MapDrawing({
         LINES.map((line) => (
           <path
             key={line}
-            d={path(known, line)}
+            d={pathOf(contours(known, line))}
             stroke="var(--color-ink-3)"
             strokeWidth={0.9}
             strokeDasharray="2 3"
@@ -97,7 +112,7 @@ export const MapDrawing = memo(function MapDrawing({
           />
         ))}
       {regions.map((region) => {
-        const line = path(region.rooms, 0);
+        const line = pathOf(outlineOf(region));
         return (
           <g key={region.placeId} fill="none" strokeLinecap="round">
             <path d={line} stroke="var(--color-ink)" strokeWidth={4.2} />
@@ -131,11 +146,11 @@ export const MapDrawing = memo(function MapDrawing({
         stroke="var(--color-ink)"
         strokeWidth={2.2}
       />
-      {named.map(({ name, at: [cx, cy] }) => (
-        <g key={name} fontSize={13} fontWeight={600} textAnchor="middle">
+      {named.map(({ placeId, name, at: [cx, cy] }) => (
+        <g key={placeId} fontSize={13} fontWeight={600} textAnchor="middle">
           <text
             x={cx}
-            y={cy}
+            y={cy + 4}
             stroke="var(--color-paper)"
             strokeWidth={4}
             strokeLinejoin="round"
@@ -143,7 +158,7 @@ export const MapDrawing = memo(function MapDrawing({
           >
             {name}
           </text>
-          <text x={cx} y={cy} fill="var(--color-ink)">
+          <text x={cx} y={cy + 4} fill="var(--color-ink)">
             {name}
           </text>
         </g>
@@ -166,94 +181,10 @@ export const MapDrawing = memo(function MapDrawing({
             </text>
           );
         })}
-      <Axis dimension={first} from={LEFT} to={right} min={minX} max={maxX} at={bottom} />
-      <Axis dimension={second} from={bottom} to={TOP} min={minY} max={maxY} at={LEFT} upright />
+      <MapAxis dimension={first} from={LEFT} to={right} min={minX} max={maxX} at={bottom} />
+      <MapAxis dimension={second} from={bottom} to={TOP} min={minY} max={maxY} at={LEFT} upright />
     </svg>
   );
 });
 
 const px = (value: number): string => value.toFixed(1);
-
-function Axis({
-  dimension,
-  from,
-  to,
-  min,
-  max,
-  at,
-  upright = false,
-}: {
-  dimension: Dimension;
-  from: number;
-  to: number;
-  min: number;
-  max: number;
-  at: number;
-  upright?: boolean;
-}) {
-  const length = Math.abs(to - from);
-  const { upper } = tapeTicks(dimension.unit, {
-    left: 0,
-    right: length,
-    valueAt: (px) => min + (px / length) * (max - min),
-  });
-  const place = (value: number) => from + ((value - min) / (max - min)) * (to - from);
-  const mark = dimension.unit === 'mm' ? '″' : '';
-  return (
-    <g fontSize={12} fill="var(--color-ink-2)">
-      {upper.map(({ value, label }) =>
-        label === undefined ? null : upright ? (
-          <g key={value}>
-            <path d={`M${at} ${place(value)}h-5`} stroke="var(--color-ink)" />
-            <text x={at - 8} y={place(value) + 4} textAnchor="end">
-              {label}
-              {mark}
-            </text>
-          </g>
-        ) : (
-          <g key={value}>
-            <path d={`M${place(value)} ${at}v5`} stroke="var(--color-ink)" />
-            <text x={place(value)} y={at + 18} textAnchor="middle">
-              {label}
-              {mark}
-            </text>
-          </g>
-        ),
-      )}
-      {upright ? (
-        <text x={0} y={11} fontWeight={600}>
-          {dimension.label}
-        </text>
-      ) : (
-        <text x={to} y={at + 38} textAnchor="end" fontWeight={600}>
-          {dimension.label}
-        </text>
-      )}
-    </g>
-  );
-}
-
-/** Each name inside its own region, away from the names before it. */
-function placeNames(
-  regions: readonly MapRegion[],
-  placeOf: (i: number, j: number) => [number, number],
-  { right, bottom }: { right: number; bottom: number },
-): { name: string; at: [number, number] }[] {
-  const taken: [number, number][] = [];
-  return regions.flatMap(({ name, rooms }) => {
-    let best: { at: [number, number]; score: number } | undefined;
-    for (const [i, row] of rooms.entries()) {
-      for (const [j, room] of row.entries()) {
-        if (room < 0) continue;
-        const [cx, cy] = placeOf(i, j);
-        if (cx < LEFT + 36 || cx > right - 36 || cy < TOP + 30 || cy > bottom - 26) continue;
-        const gap = Math.min(APART * 2, ...taken.map(([a, b]) => Math.hypot((a - cx) / 2, b - cy)));
-        const score = (gap < APART / 2 ? -1000 : 0) + gap + Math.min(room, 40);
-        if (!best || score > best.score) best = { at: [cx, cy], score };
-      }
-    }
-    if (!best) return [];
-    taken.push(best.at);
-    return [{ name: shortName(name), at: best.at }];
-  });
-}

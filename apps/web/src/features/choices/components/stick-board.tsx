@@ -1,10 +1,11 @@
 import type { StickRow, StoryStick } from '@settlewright/geometry';
 import type { Ref } from 'react';
 import { exactValue } from '@/lib/dimension-words.ts';
-import type { Answer } from '../answers.ts';
-import type { BoardLayout } from '../board-layout.ts';
+import { verdictLine, type Answer } from '../answers.ts';
+import { verdictsX, type BoardLayout } from '../board-layout.ts';
 import { useChoices } from '../choices-view.ts';
 import type { StickBand } from '@settlewright/geometry';
+import { useTurns } from '../use-turns.ts';
 import type { ShareCurves } from '../use-share-curve.ts';
 import { BoardGround, BoardNames } from './board-ground.tsx';
 import { BoardLines } from './board-lines.tsx';
@@ -20,7 +21,8 @@ interface StickBoardProps {
   curves: ShareCurves | undefined;
   crowd: readonly string[];
   shown: number;
-  settled: boolean;
+  /** Where the set stands while another value is tried. */
+  start: number | undefined;
   answers: readonly (Answer | undefined)[];
   suggested: number | undefined;
   suggestedAnswers: readonly (Answer | undefined)[];
@@ -36,15 +38,20 @@ export function StickBoard({
   curves,
   crowd,
   shown,
-  settled,
+  start,
   answers,
   suggested,
   suggestedAnswers,
 }: StickBoardProps) {
-  const { style } = useChoices();
+  const { ruleBook, style } = useChoices();
   const { unit } = stick.dimension;
   const { width, height, narrow, rowsTop, nowX, thenX } = layout;
-  const inNarrow = Math.min(Math.max(width * 0.52, 150), width - 168);
+  const turns = useTurns(answers);
+  const longest = Math.max(
+    0,
+    ...answers.map((answer) => (answer ? verdictLine(answer, ruleBook, style).length : 0)),
+  );
+  const inNarrow = verdictsX(width, longest);
   return (
     <svg
       ref={ref}
@@ -55,7 +62,7 @@ export function StickBoard({
       className="block select-none"
       fontFamily="'Work Sans', system-ui, sans-serif"
     >
-      <BoardGround layout={layout} stick={stick} rows={rows} bands={bands} curves={curves} />
+      <BoardGround layout={layout} stick={stick} rows={rows} bands={bands} curves={curves} turns={turns} />
       {!narrow && (
         <g fontSize={13} fill="var(--color-ink-2)">
           <text x={0} y={rowsTop - 62} fontSize={14} fontWeight={600} fill="var(--color-ink)">
@@ -74,11 +81,11 @@ export function StickBoard({
         rows={rows}
         answers={answers}
         shown={shown}
-        settled={settled}
+        start={start}
         suggested={suggested}
         curves={curves}
       />
-      <BoardNames layout={layout} rows={rows} />
+      <BoardNames layout={layout} rows={rows} room={narrow ? inNarrow - 6 : layout.left - 34} />
       {narrow ? (
         <BoardVerdicts layout={layout} x={inNarrow} answers={answers} />
       ) : (

@@ -1,9 +1,11 @@
 import type { StoryStick } from '@settlewright/geometry';
-import { useMemo, useRef } from 'react';
+import { useId, useMemo, useRef } from 'react';
+import { Measure } from '@/components/measure.tsx';
 import { Notice } from '@/components/notice.tsx';
+import { PopulationFields } from '@/components/population-fields.tsx';
 import { CROWD_WEAR, crowdWords, type CrowdChoice } from '@/lib/crowd/crowds.ts';
 import { useWidth } from '@/lib/use-width.ts';
-import { aboutInHundred, dimensionValue } from '@/lib/dimension-words.ts';
+import { aboutInHundred, dimensionValue, exactValue } from '@/lib/dimension-words.ts';
 import { boardLayout } from '../board-layout.ts';
 import { useChoices } from '../choices-view.ts';
 import { commonWords, countsWords } from '../common-words.ts';
@@ -11,10 +13,11 @@ import { stickBands } from '@settlewright/geometry';
 import type { TriedValues } from '../tried-values.ts';
 import type { AskedCrowd } from '../use-crowd.ts';
 import { shareAt, useShareCurves } from '../use-share-curve.ts';
+import { stickPaper } from '../stick-paper.ts';
+import { useResting } from '../use-resting.ts';
 import { useRejection } from '../use-rejection.ts';
 import { useStickValues } from '../use-stick-values.ts';
 import { sayValue } from '../words.ts';
-import { CrowdChooser } from './crowd-chooser.tsx';
 import { Decision } from './decision.tsx';
 import { PlumbSlider } from './plumb-slider.tsx';
 import { PublicWords } from './public-words.tsx';
@@ -42,7 +45,9 @@ export function StickDesk({ tried, stick, rule, crowd, asked, onCrowd }: StickDe
   const drawing = useRef<SVGSVGElement>(null);
   const [measure, width = WIDTH] = useWidth();
   const values = useStickValues(tried, stick, rule);
-  const { rows, ruleIds, present, shown, suggested, answersAt } = values;
+  const { rows, ruleIds, present, trying, shown, offer, suggested, answersAt } = values;
+  const rested = useResting(trying);
+  const aboutKeys = useId();
   const counted = useMemo(() => [...ruleIds], [ruleIds]);
   const { curves, fault = asked.fault } = useShareCurves(tried, counted, asked.request);
   const rejection = useRejection(curves, asked.request);
@@ -72,6 +77,11 @@ export function StickDesk({ tried, stick, rule, crowd, asked, onCrowd }: StickDe
     countsWords(answers.map((answer) => answer?.outcome.verdict)),
     ...(share === undefined ? [] : [aboutInHundred(share)]),
   ].join('; ');
+  const hung = trying === undefined ? present : (rested ?? present);
+  const paper = useMemo(
+    () => stickPaper(dimension, hung, rule, crowd, style),
+    [dimension, hung, rule, crowd, style],
+  );
   const common = useMemo(
     () => commonWords(stick, { present, step: tried.step, style }),
     [stick, present, tried, style],
@@ -90,7 +100,7 @@ export function StickDesk({ tried, stick, rule, crowd, asked, onCrowd }: StickDe
             curves={curves}
             crowd={crowdLines}
             shown={shown}
-            settled={shown === present}
+            start={trying === undefined ? undefined : present}
             answers={answers}
             suggested={suggested}
             suggestedAnswers={suggestedAnswers}
@@ -102,11 +112,18 @@ export function StickDesk({ tried, stick, rule, crowd, asked, onCrowd }: StickDe
             band={stick.allFit[0] ?? stick.allTight[0]}
             label={dimension.label}
             words={words}
+            isTrying={trying !== undefined}
+            describedBy={aboutKeys}
             onMove={values.move}
-            onRelease={values.settle}
+            onTake={values.settle}
             onLeave={values.leave}
           />
         </div>
+        <p id={aboutKeys} className="text-sm text-ink-2">
+          + room left, − short. Left and right keys move the plumb line by{' '}
+          <Measure text={exactValue(tried.step, unit, style)} />; Enter writes the value, Escape goes back to{' '}
+          <Measure text={exactValue(present, unit, style)} />.
+        </p>
         <StickLegend common={common} bands={bands} />
       </div>
       <Decision
@@ -114,8 +131,12 @@ export function StickDesk({ tried, stick, rule, crowd, asked, onCrowd }: StickDe
         stick={stick}
         ruleIds={ruleIds}
         present={present}
+        trying={trying === undefined ? undefined : rested}
+        offer={offer}
         suggested={suggested}
         curves={curves}
+        onTake={values.settle}
+        onLeave={values.leave}
       />
       <div className="min-w-0">
         {fault && (
@@ -125,6 +146,7 @@ export function StickDesk({ tried, stick, rule, crowd, asked, onCrowd }: StickDe
         )}
         <PublicWords
           curves={curves}
+          ruleIds={ruleIds}
           rejection={rejection}
           present={present}
           suggested={suggested}
@@ -133,7 +155,7 @@ export function StickDesk({ tried, stick, rule, crowd, asked, onCrowd }: StickDe
           wear={`shoes of ${dimensionValue(CROWD_WEAR.shoeMm, 'mm', style)}, ${CROWD_WEAR.clothing} clothes`}
         />
         <div className="mt-4 max-w-text">
-          <CrowdChooser crowd={crowd} options={asked.options} onChange={onCrowd} />
+          <PopulationFields crowd={crowd} own={asked.own} onChange={onCrowd} />
         </div>
         <div className="mt-4 flex flex-wrap items-start gap-x-8 gap-y-3">
           <StickTable
@@ -145,8 +167,7 @@ export function StickDesk({ tried, stick, rule, crowd, asked, onCrowd }: StickDe
             suggested={suggested}
             suggestedAnswers={suggestedAnswers}
           />
-          <SaveStick drawing={drawing} dimension={dimension} words={below} />
-          ruleIds={ruleIds}
+          <SaveStick drawing={drawing} dimension={dimension} words={below} asked={paper} />
         </div>
       </div>
     </div>

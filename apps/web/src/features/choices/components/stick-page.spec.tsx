@@ -21,8 +21,13 @@ vi.mock('@/lib/crowd/ask-crowd.ts', () => ({
 const heightOf = (document: SetDocument | undefined): number =>
   (document && dimensionOf(document, 'seat-height')?.value) ?? 0;
 /** A busy machine tries a hundred sets in a second or more. */
-const SLOW = { timeout: 15_000 };
+const SLOW = { timeout: 18_000 };
 const slider = () => screen.findByRole('slider', { name: 'Seat height, pressed' }, SLOW);
+
+/** Words in a drawing, whole. */
+const drawn = (words: RegExp) => (_: string, element: Element | null) =>
+  element?.tagName === 'text' && words.test(element.textContent ?? '');
+const markNow = () => screen.getByText(drawn(/^\S+″ now$/));
 
 const press = (element: HTMLElement, ...keys: string[]) => {
   for (const key of keys) fireEvent.keyDown(element, { key });
@@ -71,16 +76,94 @@ describe('the plumb line', () => {
   });
 });
 
+describe('while a value is tried', () => {
+  it('keeps the mark of where the set stands, and writes a series of keys as one step', async () => {
+    const onStep = vi.fn<(document: SetDocument, step: string) => void>();
+    showStick({ onStep });
+    const bob = await slider();
+    const [stood] = (bob.getAttribute('aria-valuetext') ?? '').split(';');
+    press(bob, 'ArrowLeft', 'ArrowLeft', 'ArrowLeft');
+    expect(bob.getAttribute('aria-valuetext')).not.toContain(`${stood};`);
+    const start = markNow().textContent.replace(' now', '');
+    expect(onStep).not.toHaveBeenCalled();
+    fireEvent.blur(bob);
+    expect(onStep).toHaveBeenCalledOnce();
+    expect(onStep.mock.lastCall?.[1]).toContain(`Seat height, pressed ${start} to `);
+  });
+
+  it('takes undo as the way back, and leaves what was written before alone', async () => {
+    const onStep = vi.fn();
+    showStick({ onStep });
+    const bob = await slider();
+    const before = bob.getAttribute('aria-valuenow');
+    press(bob, 'PageDown');
+    const pressed = fireEvent.keyDown(bob, { key: 'z', ctrlKey: true });
+    expect(bob).toHaveAttribute('aria-valuenow', before);
+    expect(pressed).toBe(false);
+    expect(fireEvent.keyDown(bob, { key: 'z', ctrlKey: true })).toBe(true);
+    expect(onStep).not.toHaveBeenCalled();
+  });
+
+  it('says whom the value under the hand costs, and goes back by a button', async () => {
+    const onStep = vi.fn();
+    const user = userEvent.setup();
+    showStick({ onStep });
+    const bob = await slider();
+    const before = bob.getAttribute('aria-valuenow');
+    bob.focus();
+    press(bob, 'PageUp', 'PageUp');
+    const back = await screen.findByRole('button', { name: /^Back to / }, SLOW);
+    expect(screen.getByText('Worse').nextElementSibling).toHaveTextContent(/Hetty|Marcus/);
+    await user.click(back);
+    expect(bob).toHaveAttribute('aria-valuenow', before);
+    expect(onStep).not.toHaveBeenCalled();
+  });
+
+  it('settles the laths whose verdict turns, and no other', async () => {
+    const { container } = showStick();
+    const bob = await slider();
+    expect(container.querySelectorAll('.lath-settles')).toHaveLength(0);
+    const verdicts = () => /; (.*?);|; (.*)$/.exec(bob.getAttribute('aria-valuetext') ?? '')?.[0];
+    const before = verdicts();
+    // Lower until the verdict of one of the two turns.
+    for (let n = 0; n < 40 && verdicts() === before; n += 1) press(bob, 'ArrowLeft');
+    expect(verdicts()).not.toBe(before);
+    expect(container.querySelectorAll('.lath-settles')).toHaveLength(1);
+  });
+
+  it('follows a finger, and writes when the focus goes elsewhere', async () => {
+    const onStep = vi.fn();
+    showStick({ onStep });
+    const bob = await slider();
+    Object.assign(bob, { setPointerCapture: () => undefined, hasPointerCapture: () => false });
+    const before = Number(bob.getAttribute('aria-valuenow'));
+    fireEvent.pointerDown(bob, { button: 0, pointerId: 4, clientX: 300 });
+    fireEvent.pointerMove(bob, { pointerId: 4, clientX: 200 });
+    const low = Number(bob.getAttribute('aria-valuenow'));
+    expect(low).toBeLessThan(before);
+    fireEvent.pointerUp(bob, { pointerId: 4 });
+    fireEvent.pointerMove(bob, { pointerId: 4, clientX: 400 });
+    expect(Number(bob.getAttribute('aria-valuenow'))).toBe(low);
+    expect(bob).toHaveClass('touch-none');
+    expect(onStep).not.toHaveBeenCalled();
+    fireEvent.blur(bob);
+    expect(onStep).toHaveBeenCalledOnce();
+  });
+});
+
 describe('the choice', () => {
-  it('keeps the look with a note: why, by whom and when', async () => {
+  it('keeps the look with a reason, by whom and when, and asks for one', async () => {
     const onStep = vi.fn<(document: SetDocument, step: string) => void>();
     const user = userEvent.setup();
     showStick({ onStep });
-    await user.type(
-      await screen.findByLabelText('Note for the known differences', {}, SLOW),
-      'The photograph shows it.',
-    );
-    await user.click(screen.getByRole('button', { name: /^Keep .* with this note$/ }));
+    const reason = await screen.findByLabelText('Why it is kept', {}, SLOW);
+    const keep = screen.getByRole('button', { name: /^Keep .* with this note$/ });
+    await user.click(keep);
+    expect(onStep).not.toHaveBeenCalled();
+    expect(reason).toHaveFocus();
+    expect(reason).toHaveAccessibleDescription(/^Say why it is kept\./);
+    await user.type(reason, 'The photograph shows it.');
+    await user.click(keep);
     const [difference] = onStep.mock.lastCall?.[0].knownDifferences ?? [];
     expect(difference).toMatchObject({
       reason: 'The photograph shows it.',
@@ -89,6 +172,18 @@ describe('the choice', () => {
     });
     expect(difference?.text).toMatch(/^Seat height, pressed kept at /);
     expect(heightOf(onStep.mock.lastCall?.[0])).toBe(heightOf(facingBenches));
+  });
+
+  it('offers a foot rail to whose feet hang, and puts it in the note', async () => {
+    const user = userEvent.setup();
+    showStick();
+    await screen.findByRole('heading', { name: 'Or a foot rail' }, SLOW);
+    const reason = screen.getByLabelText('Why it is kept');
+    expect(reason).not.toHaveAccessibleDescription(/foot rail/);
+    await user.click(screen.getByRole('button', { name: 'Put the rail in the note below' }));
+    expect(reason).toHaveAccessibleDescription(
+      /with a foot rail for Hetty \(.*″ high to fit, .*″ to be tight\)/,
+    );
   });
 
   it('takes both pieces along as one step, and then has nothing better to offer', async () => {
@@ -120,5 +215,34 @@ describe('for readers without measures', () => {
     expect(screen.getByText(/gives their bodies away/)).toBeVisible();
     expect(screen.queryByRole('slider')).toBeNull();
     expect(screen.queryByRole('table')).toBeNull();
+  });
+});
+
+describe('the paper', () => {
+  it('is asked of the server with the value under the hand, and says what went wrong', async () => {
+    const paper = vi.fn(() => Promise.reject(new Error('Somebody saved a newer draft meanwhile.')));
+    const user = userEvent.setup();
+    showStick({ paper });
+    await slider();
+    await user.click(screen.getByRole('button', { name: 'Save as PDF' }));
+    expect(paper).toHaveBeenCalledWith('story-stick.pdf', {
+      dimension: 'seat-height',
+      value: heightOf(facingBenches),
+      ruleId: 'SEAT-02',
+      populationId: 'us-civilians-2015',
+      womenPercent: 50,
+      units: 'feet-inches',
+      roundTo: 8,
+    });
+    expect(await screen.findByText('Somebody saved a newer draft meanwhile.')).toBeVisible();
+  });
+});
+
+describe('the public', () => {
+  it('has nothing to mix where a population holds one sex', async () => {
+    showStick({}, '?d=seat-height&people=german');
+    await slider();
+    expect(screen.getByRole('combobox', { name: 'Population' })).toBeVisible();
+    expect(screen.queryByRole('slider', { name: 'Women of 100 people' })).toBeNull();
   });
 });

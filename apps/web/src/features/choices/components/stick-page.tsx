@@ -4,10 +4,9 @@ import { Link } from 'react-router-dom';
 import { Combobox } from '@/components/combobox.tsx';
 import { EmptyState } from '@/components/empty-state.tsx';
 import { LoadingLine } from '@/components/loading.tsx';
-import { Measure } from '@/components/measure.tsx';
 import { Notice } from '@/components/notice.tsx';
 import { PageHeading } from '@/components/page-heading.tsx';
-import { exactValue, dimensionWords } from '@/lib/dimension-words.ts';
+import { dimensionWords } from '@/lib/dimension-words.ts';
 import { useChoices } from '../choices-view.ts';
 import { useCrowd } from '../use-crowd.ts';
 import { useStick, useTriedValues } from '../use-stick.ts';
@@ -72,7 +71,7 @@ function Ways({ roomTo, fitTo }: StickPageProps) {
 }
 
 function Stick(links: StickPageProps) {
-  const { document, ruleBook, style } = useChoices();
+  const { document, ruleBook } = useChoices();
   const address = useStickAddress();
   const asked = useCrowd(address.crowd);
   const offered = useMemo(() => dimensionsOf(document), [document]);
@@ -112,12 +111,6 @@ function Stick(links: StickPageProps) {
             />
           )}
         </div>
-        {tried && (
-          <p className="text-sm text-ink-2">
-            + room left, − short · left and right keys move the plumb line by{' '}
-            <Measure text={exactValue(tried.step, tried.dimension.unit, style)} />
-          </p>
-        )}
       </div>
       {!tried && <Notice>This set has no such number now. Choose another dimension.</Notice>}
       {tried && !stick && (

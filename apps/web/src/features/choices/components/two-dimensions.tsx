@@ -10,6 +10,7 @@ import { useWidth } from '@/lib/use-width.ts';
 import { exactValue, dimensionWords } from '@/lib/dimension-words.ts';
 import { bestPairs, type BestPair, type CastMap } from '@settlewright/geometry';
 import { useChoices } from '../choices-view.ts';
+import { pricedPairs } from '../pair-costs.ts';
 import type { TriedValues } from '../tried-values.ts';
 import type { AskedCrowd } from '../use-crowd.ts';
 import { useCastMap } from '../use-cast-map.ts';
@@ -29,6 +30,9 @@ interface TwoDimensionsProps {
 }
 
 const WIDTH = 720;
+/** Pairs that are looked at with every check, and those of them that are shown. */
+const PRICED = 12;
+const SHOWN = 5;
 const CHECKS = [
   { value: 'own', words: 'the two numbers’ own' },
   { value: 'every', words: 'every check that either moves' },
@@ -45,7 +49,7 @@ export function TwoDimensions({
   everyCheck,
   onEveryCheck,
 }: TwoDimensionsProps) {
-  const { document, replace, style } = useChoices();
+  const { document, check, replace, ruleBook, style } = useChoices();
   const [measure, width = WIDTH] = useWidth();
   const { dimension: first } = tried;
   const { second, map, shares, done, fault } = useCastMap(
@@ -59,7 +63,16 @@ export function TwoDimensions({
     () => ({ across: now, up: (secondId && dimensionOf(document, secondId)?.value) || 0 }),
     [now, document, secondId],
   );
-  const pairs = useMemo(() => (map ? bestPairs(map, shares, present) : []), [map, shares, present]);
+  const pairs = useMemo(() => {
+    if (!map || !second) return [];
+    const sheetAt = ({ across, up }: BestPair) => {
+      const moved = first.at(across);
+      const set = moved && second.at(up, moved);
+      return set && check(set);
+    };
+    const best = bestPairs(map, shares, present, PRICED);
+    return pricedPairs(best, check(document), sheetAt, ruleBook).slice(0, SHOWN);
+  }, [map, shares, present, first, second, check, document, ruleBook]);
   const take = ({ across, up }: BestPair) => {
     const moved = first.at(across);
     const set = moved && second?.at(up, moved);

@@ -45,10 +45,13 @@ interface Seated {
 export const HETTY: Seated = { id: 'hetty', name: 'Hetty Vance', person: person(1511, 360, 52) };
 const MARCUS: Seated = { id: 'marcus', name: 'Marcus Adeyemi-Rowe', person: person(1905, 480, 95) };
 
-/** As the room checks these people: one sheet a document. */
+/** As the room checks these people: one sheet a document, also for another document that says the same. */
 export function checkOf(people: readonly Seated[]): ChoicesView['check'] {
-  const sheets = new WeakMap<SetDocument, FitSheet>();
+  const sheets = new Map<string, FitSheet>();
   return (document) => {
+    const key = JSON.stringify(document);
+    const known = sheets.get(key);
+    if (known) return known;
     const situation = measureSet(document, ruleBook);
     const sitters = people.map((one, n): Sitter => ({
       ...one,
@@ -56,9 +59,8 @@ export function checkOf(people: readonly Seated[]): ChoicesView['check'] {
       placeId: situation.places[n]?.placeId ?? '',
     }));
     const settings = document.asked;
-    const sheet =
-      sheets.get(document) ?? checkSet({ situation, sitters, ruleBook, model, settings, sittersOnly: true });
-    sheets.set(document, sheet);
+    const sheet = checkSet({ situation, sitters, ruleBook, model, settings, sittersOnly: true });
+    sheets.set(key, sheet);
     return sheet;
   };
 }
@@ -80,6 +82,7 @@ function Stick({ onStep, ...view }: Shown) {
     document,
     check,
     replace,
+    paper: () => Promise.resolve(),
     ruleBook,
     style: INCHES,
     detail: 'full',

@@ -2,6 +2,7 @@ import type { SetDocument } from '@settlewright/geometry';
 import { useState } from 'react';
 import { Button } from '@/components/button.tsx';
 import { Dialog } from '@/components/dialog.tsx';
+import { ReasonField } from '@/components/reason-field.tsx';
 import { RuleHeading } from '@/components/rule-heading.tsx';
 import { TextArea } from '@/components/text-field.tsx';
 import { dayWords } from '@/lib/dates.ts';
@@ -134,14 +135,7 @@ function AddDifference({ document, onReplace }: Props) {
         rows={2}
         onChange={(event) => setText(event.target.value)}
       />
-      <TextArea
-        label="Why it is kept"
-        description="Optional. For example: the photograph shows it, and the camera sees it."
-        value={reason}
-        maxLength={1000}
-        rows={2}
-        onChange={(event) => setReason(event.target.value)}
-      />
+      <ReasonField optional value={reason} onChange={setReason} />
       <div>
         <Button type="submit" size="small">
           Add it

@@ -2,7 +2,6 @@ import type { Piece } from '@settlewright/geometry';
 import { useMemo, useState, type ReactNode } from 'react';
 import { useStore } from 'zustand';
 import { Button } from '@/components/button.tsx';
-import { Notice } from '@/components/notice.tsx';
 import type { SetInfo } from '../api.ts';
 import { useRoomAddress } from '../hooks/use-address.ts';
 import { useChoosing } from '../hooks/use-choosing.ts';
@@ -15,6 +14,7 @@ import { RoomContext, useAutosave, usePicture, useSurroundings } from '../room-c
 import { useRoomStore, useUndo } from '../store.ts';
 import { ChosenPieces } from './chosen-pieces.tsx';
 import { ConflictScreen } from './conflict-screen.tsx';
+import { DraftRefused } from './draft-refused.tsx';
 import { EmptySet } from './empty-set.tsx';
 import { IssueRevision } from './issue-revision.tsx';
 import { KeyPlan } from './key-plan.tsx';
@@ -85,11 +85,7 @@ export function RoomDesk({ lastRevision, foot, aboutPiece }: Props) {
         </h1>
         <div className="mx-auto grid min-h-0 w-full max-w-[90rem] flex-1 gap-x-9 px-8 pt-4 max-tablet:px-4 max-tablet:pt-2 tablet:grid-cols-[16.25rem_minmax(0,1fr)]">
           <div className="flex min-h-0 min-w-0 flex-col gap-2 max-tablet:order-1 tablet:order-2">
-            {save.kind === 'refused' && (
-              <Notice tone="wont" title="The draft was not taken">
-                {save.message} Your changes stay on this device.
-              </Notice>
-            )}
+            {save.kind === 'refused' && <DraftRefused message={save.message} />}
             {empty ? (
               <EmptySet document={document} actions={actions} onSelect={address.select} />
             ) : (

@@ -24,34 +24,49 @@ export function chooseSingleKeys(on: boolean): void {
   useSingleKeys.setState({ on });
 }
 
-export interface ShortcutActions {
-  undo: () => void;
-  redo: () => void;
+export interface ShortcutActions extends UndoActions {
   toggleFit: () => void;
   show: (letter: ViewLetter) => void;
   help: () => void;
+}
+
+/** What the keys of undo and redo do. */
+export interface UndoActions {
+  undo: () => void;
+  redo: () => void;
 }
 
 const isTyping = (target: EventTarget | null): boolean =>
   target instanceof HTMLElement &&
   (target.isContentEditable || target.matches('input, textarea, select, [role="listbox"], [role="menu"] *'));
 
-/** Keys of the whole page; none while something is typed or a dialog is open. */
+const isTaken = (event: KeyboardEvent): boolean =>
+  event.defaultPrevented || isTyping(event.target) || document.querySelector('[role="dialog"]') !== null;
+
+/** Undo and redo of the whole page; none while something is typed or a dialog is open. */
+export function useUndoKeys({ undo, redo }: UndoActions): void {
+  useEffect(() => {
+    const listen = (event: KeyboardEvent) => {
+      if (isTaken(event) || !(event.ctrlKey || event.metaKey) || event.altKey) return;
+      const key = event.key.toLowerCase();
+      if (key === 'z') (event.shiftKey ? redo : undo)();
+      else if (key === 'y') redo();
+      else return;
+      event.preventDefault();
+    };
+    window.addEventListener('keydown', listen);
+    return () => window.removeEventListener('keydown', listen);
+  }, [undo, redo]);
+}
+
+/** Keys of the room; none while something is typed or a dialog is open. */
 export function useShortcuts(actions: ShortcutActions): void {
+  useUndoKeys(actions);
   const on = useSingleKeys((state) => state.on);
   useEffect(() => {
     const listen = (event: KeyboardEvent) => {
-      if (event.defaultPrevented || isTyping(event.target)) return;
-      if (document.querySelector('[role="dialog"]')) return;
+      if (isTaken(event) || !on || event.altKey || event.ctrlKey || event.metaKey) return;
       const key = event.key.toLowerCase();
-      if ((event.ctrlKey || event.metaKey) && !event.altKey) {
-        if (key === 'z') (event.shiftKey ? actions.redo : actions.undo)();
-        else if (key === 'y') actions.redo();
-        else return;
-        event.preventDefault();
-        return;
-      }
-      if (!on || event.altKey) return;
       const letter = VIEW_LETTERS.find((candidate) => candidate === event.key.toUpperCase());
       if (key === 'f') actions.toggleFit();
       else if (event.key === '?') actions.help();

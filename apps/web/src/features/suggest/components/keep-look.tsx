@@ -1,5 +1,6 @@
-import { useState } from 'react';
+import { useRef, useState } from 'react';
 import { Button } from '@/components/button.tsx';
+import { REASON_MISSING, ReasonField } from '@/components/reason-field.tsx';
 import { RuleHeading } from '@/components/rule-heading.tsx';
 import { TextArea } from '@/components/text-field.tsx';
 import { withKnownDifference } from '@/lib/known-difference.ts';
@@ -15,7 +16,9 @@ export function KeepLook({ moves }: { moves: readonly Move[] }) {
   const offered = differenceWords(moves, style);
   const [typed, setTyped] = useState<string>();
   const [reason, setReason] = useState('');
+  const [asked, setAsked] = useState(false);
   const [kept, setKept] = useState(false);
+  const field = useRef<HTMLTextAreaElement>(null);
   const text = (typed ?? offered).trim();
   if (!replace) return null;
   return (
@@ -26,9 +29,15 @@ export function KeepLook({ moves }: { moves: readonly Move[] }) {
         onSubmit={(event) => {
           event.preventDefault();
           if (text === '') return;
+          if (reason.trim() === '') {
+            setAsked(true);
+            field.current?.focus();
+            return;
+          }
           const said = { text, reason: reason.trim(), by };
           replace(withKnownDifference(document, said), 'Known difference added');
           setKept(true);
+          setAsked(false);
           setReason('');
         }}
       >
@@ -39,14 +48,11 @@ export function KeepLook({ moves }: { moves: readonly Move[] }) {
           rows={2}
           onChange={(event) => setTyped(event.target.value)}
         />
-        <TextArea
-          label="Why"
-          description="Stands in the known differences with your name and today’s date."
-          placeholder="For example: the photograph shows it, and the camera sees it."
+        <ReasonField
+          ref={field}
           value={reason}
-          maxLength={1000}
-          rows={2}
-          onChange={(event) => setReason(event.target.value)}
+          error={asked && reason.trim() === '' ? REASON_MISSING : undefined}
+          onChange={setReason}
         />
         <div className="flex flex-wrap items-center gap-4">
           <Button type="submit">Keep as it is, with a note</Button>

@@ -97,7 +97,12 @@ describe('suggested dimensions', () => {
     const onReplace = vi.fn();
     const { user } = show({ onReplace });
     await user.click(screen.getByRole('button', { name: 'Search' }));
-    await user.type(await screen.findByLabelText('Why', {}, FOUND), 'The photograph shows it.');
+    const reason = await screen.findByLabelText('Why it is kept', {}, FOUND);
+    await user.click(screen.getByRole('button', { name: 'Keep as it is, with a note' }));
+    expect(onReplace).not.toHaveBeenCalled();
+    expect(reason).toHaveFocus();
+    expect(reason).toHaveAccessibleDescription(/Say why it is kept\./);
+    await user.type(reason, 'The photograph shows it.');
     await user.click(screen.getByRole('button', { name: 'Keep as it is, with a note' }));
     const [document] = onReplace.mock.lastCall as [typeof bay];
     expect(document.pieces).toEqual(bay.pieces);
@@ -107,11 +112,6 @@ describe('suggested dimensions', () => {
     expect(kept?.on).toMatch(/^\d{4}-\d\d-\d\d$/);
   });
 
-  it('stops and keeps what is found', async () => {
-    isHeld = true;
-    const { user } = show();
-    await user.click(screen.getByRole('button', { name: 'Search' }));
-    await screen.findByRole('region', { name: /^Best found/ }, FOUND);
   it('says once that a place has no body behind it', () => {
     const { unmount } = show({ placesWithoutBody: 2 });
     expect(screen.getByText(/^2 places have no body behind them/)).toHaveTextContent(/never count as served/);
@@ -120,6 +120,11 @@ describe('suggested dimensions', () => {
     expect(screen.queryByText(/no body behind/)).toBeNull();
   });
 
+  it('stops and keeps what is found', async () => {
+    isHeld = true;
+    const { user } = show();
+    await user.click(screen.getByRole('button', { name: 'Search' }));
+    await screen.findByRole('region', { name: /^Best found/ }, FOUND);
     expect(screen.getByRole('progressbar')).toBeVisible();
     expect(screen.queryByRole('button', { name: /Take it/ })).toBeNull();
     await user.click(screen.getByRole('button', { name: /Stop and keep/ }));

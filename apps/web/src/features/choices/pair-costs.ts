@@ -1,0 +1,47 @@
+import type { FitSheet, RuleBook } from '@settlewright/anthropometry';
+import { isLoss, sheetChanges, type BestPair, type CellChange } from '@settlewright/geometry';
+import { joinWords } from '@/lib/dimension-words.ts';
+import { shortName } from '@/lib/short-name.ts';
+
+/** A pair of values, and whom it costs a verdict by any check. */
+export interface PricedPair extends BestPair {
+  /** Whom it turns away who is at least tight now: "Marcus, thigh room"; empty when nobody. */
+  costs: string[];
+  /** How many people and pieces those are. */
+  turnedAway: number;
+  /** Other verdicts that turn worse. */
+  lesser: number;
+}
+
+/** Pairs with whom they cost, those that turn the fewest people away first. */
+export function pricedPairs(
+  pairs: readonly BestPair[],
+  before: FitSheet,
+  sheetAt: (pair: BestPair) => FitSheet | undefined,
+  ruleBook: RuleBook,
+): PricedPair[] {
+  const names = new Map(before.rows.map(({ sitterId, name }) => [sitterId, shortName(name)]));
+  return pairs
+    .flatMap((pair): PricedPair[] => {
+      const after = sheetAt(pair);
+      if (!after) return [];
+      const losses = sheetChanges(before, after).filter(isLoss);
+      const away = losses.filter(isAway);
+      const byWho = new Map<string, string[]>();
+      for (const { sitterId, marks, ruleId } of away) {
+        const who = names.get(sitterId ?? '') ?? joinWords(marks);
+        byWho.set(who, [...(byWho.get(who) ?? []), ruleBook.rule(ruleId).columnName.toLowerCase()]);
+      }
+      return [
+        {
+          ...pair,
+          costs: [...byWho].map(([who, checks]) => `${who}, ${joinWords(checks)}`),
+          turnedAway: byWho.size,
+          lesser: losses.length - away.length,
+        },
+      ];
+    })
+    .sort((a, b) => a.turnedAway - b.turnedAway);
+}
+
+const isAway = ({ from, to }: CellChange): boolean => from !== 'notKnown' && to !== 'tight';
