@@ -29,7 +29,7 @@ export interface SitterNext {
   next: NextMeasures;
 }
 
-/** How many people may be worked out anew for one request, and how many were not for want of turns. */
+/** How many people may be worked out anew for one request, and who was not for want of turns, once for each place. */
 export interface Turns {
   left: number;
   leftOut: string[];

@@ -37,8 +37,9 @@ const HOW =
 const PRIVACY =
   'This sheet is personal data. Ask first, measure where others do not look on, show it to nobody who does not need ' +
   'it, and destroy it once the numbers are entered.';
-/** Largest first; the smallest takes as many lines as it needs. */
-const NAME_SIZES = [20, 15, 11] as const;
+/** Largest first; a name too long for two lines of each takes as many of the smallest as it needs. */
+const NAME_SIZES = [20, 15] as const;
+const SMALLEST_NAME = 11;
 const MOST_NAME_LINES = 2;
 const ALL_KEYS: readonly NextMeasureKey[] = ['stature', 'weight_kg', ...TAPE_MEASURE_KEYS];
 
@@ -99,7 +100,7 @@ function drawHead(
   const own = width * 0.32;
   const size =
     NAME_SIZES.find((one) => linesNeeded(sheet, person.name, own, { size: one }) <= MOST_NAME_LINES) ??
-    NAME_SIZES[NAME_SIZES.length - 1];
+    SMALLEST_NAME;
   const style = { size, weight: 300 } as const;
   const afterName = paragraph(sheet, person.name, x, top + 2.4 + 0.38 * size, own, style);
   const role = afterName - leading(size) + 6;
