@@ -59,6 +59,8 @@ export type ServerStudy = Omit<Schema['ListedStudyDto'], 'outcome'> & { outcome?
 export type OwnSurvey = Schema['PopulationDto'];
 export type SurveyPreview = Schema['PopulationPreviewDto'];
 export type SurveyMapping = Schema['MappingDto'];
+export type OpenSurveyMapping = Schema['OpenMappingDto'];
+export type SurveyUse = Schema['PopulationUseDto'];
 
 export type OrderState = Schema['OrderState'];
 export type OrderSummary = Schema['OrderSummaryDto'];

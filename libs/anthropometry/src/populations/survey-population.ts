@@ -72,6 +72,11 @@ export type OwnSurvey = Pick<PopulationDetails, 'id' | 'name' | 'source' | 'lice
  */
 export function ownPopulation(survey: Survey, named: OwnSurvey): Population {
   const cautions = ['A survey of few people says little of the smallest and the largest.'];
+  if (survey.read.size < survey.measures.length) {
+    cautions.push(
+      'Measures that were not taken are estimated from the rest, as they hang together in US soldiers of 2012.',
+    );
+  }
   return surveyPopulation(survey, { ...named, kind: 'own', cautions });
 }
 

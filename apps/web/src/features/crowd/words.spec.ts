@@ -23,9 +23,18 @@ describe('shares in words', () => {
   ])('puts “about” before a number alone: %d', (value, about) => expect(isAbout({ value })).toBe(about));
 
   it('closes a range that rounding closes', () => {
-    expect(rangeWords({ low: 0.331, high: 0.334 })).toBe('33');
-    expect(rangeWords({ low: 0.33, high: 0.36 })).toBe('33 to 36');
+    expect(rangeWords({ low: 0.331, high: 0.334 })).toBe('Counting alone moves it by less than 1');
+    expect(rangeWords({ low: 0.33, high: 0.36 })).toBe('33 to 36 by counting alone');
   });
+
+  it.each([
+    [{ value: 0.342, low: 0.341, high: 0.343 }, 'About 34.2 in 100 (34.1 to 34.3)'],
+    [{ value: 0, low: 0, high: 0.000004 }, 'None in 100'],
+    [{ value: 0, low: 0, high: 0.012 }, 'None in 100 (0.0 to 1.2)'],
+    [{ value: 0.0001, low: 0.0001, high: 0.0001 }, 'Fewer than 0.1 in 100'],
+    [{ value: 0.9999, low: 0.9999, high: 0.9999 }, 'More than 99.9 in 100'],
+    [{ value: 1, low: 1, high: 1 }, 'All of 100'],
+  ])('tells a large count to a tenth: %o', (value, words) => expect(fineWords(value)).toBe(words));
 
   it('tells the sexes apart only where there are both', () => {
     expect(sexWords({ mixed: share(0.3), women: share(0.4), men: share(0.2) })).toBe('women 40, men 20');

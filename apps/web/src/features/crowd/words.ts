@@ -15,7 +15,7 @@ export const isAbout = ({ value }: Pick<Share, 'value'>): boolean => /^[1-9]/.te
 /** "33 to 35 by counting alone": the range of a share, in people of 100. */
 export function rangeWords({ low, high }: Pick<Share, 'low' | 'high'>): string {
   const [from, to] = [Math.round(low * 100), Math.round(high * 100)];
-  return from === to ? `${from}` : `${from} to ${to}`;
+  return from === to ? 'Counting alone moves it by less than 1' : `${from} to ${to} by counting alone`;
 }
 
 /** "women 41, men 27"; nothing for people of one sex. */
@@ -44,6 +44,11 @@ export const WEAR_WORDS = `Everybody wears shoes of ${CROWD_WEAR.shoeMm} mm and 
 
 const tenth = (share: number): string => (share * 100).toFixed(1);
 
-/** "About 34.2 (34.1 to 34.3)", for counts so large that tenths mean something. */
-export const fineRange = ({ value, low, high }: Share): string =>
-  `About ${tenth(value)} (${tenth(low)} to ${tenth(high)})`;
+/** "About 34.2 in 100 (34.1 to 34.3)", for counts so large that tenths mean something. */
+export function fineWords({ value, low, high }: Share): string {
+  const range = tenth(low) === tenth(high) ? '' : ` (${tenth(low)} to ${tenth(high)})`;
+  if (value === 0) return `None in 100${range}`;
+  if (value === 1) return `All of 100${range}`;
+  if (tenth(value) === '0.0') return `Fewer than 0.1 in 100${range}`;
+  return tenth(value) === '100.0' ? `More than 99.9 in 100${range}` : `About ${tenth(value)} in 100${range}`;
+}

@@ -30,8 +30,8 @@ export function AllAtOnce({ outcome, checks, of }: AllAtOnceProps) {
         <span className="text-xl font-light"> in 100 fit {counted}</span>
       </p>
       <p className="mt-1 text-ink-2">
-        {rangeWords(fits.mixed)} by counting alone{sexes && `; ${sexes}`}. At least tight:{' '}
-        {ofHundred(atLeastTight.mixed)} in 100.
+        {rangeWords(fits.mixed)}
+        {sexes && `; ${sexes}`}. At least tight: {ofHundred(atLeastTight.mixed)} in 100.
       </p>
     </div>
   );

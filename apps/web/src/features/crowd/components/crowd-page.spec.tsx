@@ -148,7 +148,7 @@ describe('who fits', () => {
     ];
     show();
     expect(
-      await screen.findByText(/About 34.2 \(34.2 to 34.3\) in 100 fit all checks at once/, {}, COUNTED),
+      await screen.findByText(/About 34.2 in 100 \(34.2 to 34.3\) fit all checks at once/, {}, COUNTED),
     ).toBeVisible();
     expect(screen.queryByRole('button', { name: 'Count a million' })).toBeNull();
   });

@@ -1,5 +1,6 @@
 import { useEffect, useState } from 'react';
 import { Link, useSearchParams } from 'react-router-dom';
+import { Button } from '@/components/button.tsx';
 import { EmptyState } from '@/components/empty-state.tsx';
 import { LoadingLine } from '@/components/loading.tsx';
 import { Notice } from '@/components/notice.tsx';
@@ -7,12 +8,13 @@ import { PageHeading } from '@/components/page-heading.tsx';
 import { PopulationFields } from '@/components/population-fields.tsx';
 import { announce } from '@/lib/announce.ts';
 import { CROWDS, crowdWords, DEFAULT_CROWD, type CrowdChoice } from '@/lib/crowd/crowds.ts';
-import { useOwnCrowd, useOwnCrowds } from '@/lib/crowd/own-crowds.ts';
 import { countedWords, EVERY_PLACE, SHARES_DIFFER } from '@/lib/crowd/counted-words.ts';
+import { useOwnCrowd, useOwnCrowds } from '@/lib/crowd/own-crowds.ts';
 import { usePageTitle } from '@/lib/page-title.ts';
 import { useWorkshop } from '@/lib/workshop.ts';
 import { useCrowdView } from '../crowd-view.ts';
 import { AddSurvey } from '../survey/add-survey.tsx';
+import { OwnSurveys } from '../survey/own-surveys.tsx';
 import { useShares, type Shares } from '../use-shares.ts';
 import { isAbout, ofHundred, rejectionWords } from '../words.ts';
 import { AllAtOnce } from './all-at-once.tsx';
@@ -74,9 +76,9 @@ function useCrowdAddress(): [CrowdChoice, (crowd: CrowdChoice) => void] {
 
 function Counted() {
   const { ruleBook } = useCrowdView();
+  const nameOf = (ruleId: string) => ruleBook.rule(ruleId).columnName.toLowerCase();
   const { canEdit } = useWorkshop();
   const [crowd, choose] = useCrowdAddress();
-  const nameOf = (ruleId: string) => ruleBook.rule(ruleId).columnName.toLowerCase();
   const [unticked, setUnticked] = useState<ReadonlySet<string>>(new Set());
   const own = useOwnCrowds();
   const ownCrowd = useOwnCrowd(crowd.populationId);
@@ -92,18 +94,25 @@ function Counted() {
   // Until the part is counted the whole stays in view, faint.
   const joint = isPart ? { ...part, shares: part.shares ?? every.shares } : every;
   const fault = ownCrowd.error?.message ?? every.fault ?? part.fault;
+  const worst = joint.isCounting ? undefined : joint.shares?.rejectsMost?.ruleId;
   useSaid(joint);
   return (
     <>
       <div className="mb-8 max-w-text">
         <PopulationFields crowd={crowd} own={own} onChange={choose} />
-        {canEdit && <AddSurvey onAdded={(populationId) => choose({ ...crowd, populationId })} />}
+        {canEdit && (
+          <div className="mt-2 grid justify-items-start gap-1">
+            <AddSurvey onAdded={(populationId) => choose({ ...crowd, populationId })} />
+            <OwnSurveys onRemoved={(id) => id === crowd.populationId && choose(DEFAULT_CROWD)} />
+          </div>
+        )}
       </div>
       {fault !== undefined && (
         <Notice tone="wont" title="The people could not be counted">
           {fault}
         </Notice>
       )}
+      {fault !== undefined && !every.shares && <CountMillion />}
       {!every.shares && fault === undefined && <LoadingLine words="Drawing the people" />}
       {every.shares && joint.shares && (
         <div className={joint.isCounting ? 'quick opacity-60' : 'quick'} aria-busy={joint.isCounting}>
@@ -113,15 +122,6 @@ function Counted() {
             ) : (
               <>
                 <AllAtOnce outcome={joint.shares.all} checks={ticked.size} of={all.length} />
-                <p className="mt-2">
-                  {rejectionWords(joint.shares.rejectsMost, joint.shares.rejectsNext, ruleBook)}
-                </p>
-              </>
-            )}
-          </div>
-          <CheckShares
-            checks={every.shares.checks}
-            ticked={ticked}
                 <p className="mt-2 max-w-text text-sm text-ink-2">
                   {countedWords({
                     passes: 'fit',
@@ -130,6 +130,20 @@ function Counted() {
                   })}{' '}
                   {SHARES_DIFFER}
                 </p>
+                <p className="mt-2">
+                  {rejectionWords(joint.shares.rejectsMost, joint.shares.rejectsNext, ruleBook)}{' '}
+                  {worst !== undefined && ticked.size > 1 && (
+                    <Button look="word" onClick={() => setUnticked(new Set([...unticked, worst]))}>
+                      Count without {nameOf(worst)}
+                    </Button>
+                  )}
+                </p>
+              </>
+            )}
+          </div>
+          <CheckShares
+            checks={every.shares.checks}
+            ticked={ticked}
             onTick={(ids) => setUnticked(new Set(all.filter((id) => !ids.includes(id))))}
           />
           <PlaceShares places={joint.shares.places} />

@@ -5,9 +5,10 @@ import { beforeEach, describe, expect, it, vi } from 'vitest';
 import { renderPage, signInAs, WORKSHOP_ID } from '@/test/render-page.tsx';
 import { server } from '@/test/server.ts';
 import { AddSurvey } from './add-survey.tsx';
-import { columnUse, wholeMapping, withUnit, withUse, type OpenMapping } from './mapping.ts';
+import type { OpenSurveyMapping } from '@/lib/contract.ts';
+import { columnUse, wholeMapping, withUnit, withUse } from './mapping.ts';
 
-const GUESSED: OpenMapping = {
+const GUESSED: OpenSurveyMapping = {
   sex: { column: 'sex' },
   measures: [
     { key: 'stature', column: 'height', unit: 'mm' },
@@ -37,7 +38,7 @@ describe('a survey of one’s own', () => {
     signInAs('owner');
     server.use(
       http.post('*/populations/preview', async ({ request }) => {
-        const { mapping } = (await request.json()) as { mapping?: OpenMapping };
+        const { mapping } = (await request.json()) as { mapping?: OpenSurveyMapping };
         return HttpResponse.json({ ...read, ...(mapping ? { mapping } : {}) });
       }),
       http.post('*/populations', async ({ request }) => {
@@ -62,7 +63,6 @@ describe('a survey of one’s own', () => {
         { timeout: 15_000 },
       ),
     ).toBeVisible();
-    await user.click(within(dialog).getByRole('button', { name: /Faults: 1/ }));
     expect(within(dialog).getByText(/Line 7, height: “tall”/)).toBeVisible();
     const add = within(dialog).getByRole('button', { name: 'Add these 40 people' });
     expect(add).toBeDisabled();
@@ -73,6 +73,24 @@ describe('a survey of one’s own', () => {
     await user.click(add);
     await vi.waitFor(() => expect(onAdded).toHaveBeenCalledWith('own-1'), { timeout: 15_000 });
     expect(sent).toEqual([expect.objectContaining({ name: 'The crew', keepRows: false, mapping: GUESSED })]);
+  });
+
+  it('loses nothing that was typed when a column is read another way, or the slip is closed', async () => {
+    const user = userEvent.setup({ delay: null });
+    renderPage(<AddSurvey onAdded={vi.fn()} />, { path: '/w/:workshopId', at: `/w/${WORKSHOP_ID}` });
+    await user.click(screen.getByRole('button', { name: 'Add your own survey' }));
+    const file = new File(['sex,height,weight,knee\nf,1600,60,480'], 'crew.csv', { type: 'text/csv' });
+    await user.upload(await screen.findByLabelText(/The table as a CSV file/), file);
+    await user.click(await screen.findByLabelText('Name', {}, { timeout: 15_000 }));
+    await user.paste('The crew');
+    await user.click(screen.getByRole('checkbox', { name: /comma stands before/ }));
+    await vi.waitFor(() => expect(screen.getByRole('status')).toHaveAttribute('aria-busy', 'false'), {
+      timeout: 15_000,
+    });
+    expect(screen.getByLabelText('Name')).toHaveValue('The crew');
+    await user.click(screen.getByRole('button', { name: 'Close' }));
+    await user.click(await screen.findByRole('button', { name: 'Go on with crew.csv' }));
+    expect(await screen.findByLabelText('Name')).toHaveValue('The crew');
   });
 });
 
@@ -86,7 +104,11 @@ describe('what columns are', () => {
 
   it('knows the unit of each column', () => {
     expect(withUnit(GUESSED, 'height', 'in').measures[0]?.unit).toBe('in');
-    expect(withUse(GUESSED, 'knee', 'weight_kg').measures.at(-1)?.unit).toBe('kg');
+    // Of a column that is pointed out the server finds it.
+    const pointed = withUse(GUESSED, 'knee', 'weight_kg');
+    expect(pointed.measures.at(-1)).toEqual({ key: 'weight_kg', column: 'knee' });
+    expect(wholeMapping(pointed)).toBeUndefined();
+    expect(wholeMapping(withUnit(pointed, 'knee', 'lb'))?.measures.at(-1)?.unit).toBe('lb');
   });
 
   it('cannot be sent without the sex', () => {

@@ -1,74 +1,65 @@
 import { useState } from 'react';
 import { Button } from '@/components/button.tsx';
 import { Dialog } from '@/components/dialog.tsx';
-import { LARGEST_CSV_BYTES, readTextFile } from '@/lib/read-text-file.ts';
-import { sayProblem } from '@/lib/problem.ts';
 import { useWorkshop } from '@/lib/workshop.ts';
-import { usePreviewSurvey } from './api.ts';
-import { SurveyForm } from './survey-form.tsx';
+import { NO_WORDS, SurveyForm } from './survey-form.tsx';
+import { useSurveyTable } from './use-survey-table.ts';
 
-/** A table of measured people as a population of the workshop's own. */
+const PICKER =
+  'mt-1 block w-full text-sm text-ink-2 file:mr-4 file:min-h-9 file:cursor-pointer file:rounded-sm file:border-[1.25px] file:border-solid file:border-rule-strong file:bg-transparent file:px-3.5 file:text-sm file:font-medium file:text-ink';
+
+/** A table of measured people as a population of the workshop's own. What was typed stays when the slip is closed. */
 export function AddSurvey({ onAdded }: { onAdded: (id: string) => void }) {
   const { id } = useWorkshop();
   const [open, setOpen] = useState(false);
-  const [csv, setCsv] = useState('');
-  const [problem, setProblem] = useState<string>();
-  const preview = usePreviewSurvey(id);
-  const close = () => {
-    setOpen(false);
-    setCsv('');
-    setProblem(undefined);
-    preview.reset();
-  };
-  const take = async (file: File | undefined) => {
-    if (!file) return;
-    if (file.size > LARGEST_CSV_BYTES) {
-      setProblem(
-        `“${file.name}” holds more than 2 MB, the most that is read at once. Take part of the rows.`,
-      );
-      return;
-    }
-    setProblem(undefined);
-    const text = await readTextFile(file);
-    setCsv(text);
-    preview.mutate({ csv: text });
-  };
-  const fault = problem ?? (preview.isError ? sayProblem(preview.error) : undefined);
+  const [words, setWords] = useState(NO_WORDS);
+  const { table, fault, isReading, take, change, forget } = useSurveyTable(id);
   return (
     <>
       <Button look="word" onClick={() => setOpen(true)}>
-        Add your own survey
+        {table ? `Go on with ${table.fileName}` : 'Add your own survey'}
       </Button>
       <Dialog
         wide
         open={open}
-        onClose={close}
+        onClose={() => setOpen(false)}
         title="Add your own survey"
         describe="A table, one person a row, with sex, height, weight and whatever else was measured. Only statistics are kept, unless you say otherwise."
       >
-        {preview.data ? (
+        <label className="mb-5 block text-sm">
+          <span className="font-medium">{table ? 'Another table instead' : 'The table as a CSV file'}</span>
+          <input
+            type="file"
+            accept=".csv,.txt,text/csv,text/plain"
+            // So that the same file can be taken again once it was put right.
+            onClick={(event) => {
+              event.currentTarget.value = '';
+            }}
+            onChange={(event) => {
+              const [file] = event.target.files ?? [];
+              if (file) void take(file);
+            }}
+            className={PICKER}
+          />
+          <span aria-live="polite">
+            {fault && <span className="mt-2 block font-medium text-wont">{fault}</span>}
+            {isReading && !table && <span className="mt-2 block text-ink-2">Reading</span>}
+          </span>
+        </label>
+        {table && (
           <SurveyForm
-            csv={csv}
-            read={preview.data}
-            isReading={preview.isPending}
-            onRead={(mapping) => preview.mutate({ csv, mapping })}
+            table={table}
+            words={words}
+            isReading={isReading}
+            onMapping={change}
+            onWords={setWords}
             onAdded={(added) => {
-              close();
+              setOpen(false);
+              setWords(NO_WORDS);
+              forget();
               onAdded(added);
             }}
           />
-        ) : (
-          <label className="block text-sm">
-            <span className="font-medium">The table as a CSV file</span>
-            <input
-              type="file"
-              accept=".csv,.txt,text/csv,text/plain"
-              onChange={(event) => void take(event.target.files?.[0])}
-              className="mt-1 block w-full text-sm text-ink-2 file:mr-4 file:min-h-9 file:cursor-pointer file:rounded-sm file:border-[1.25px] file:border-solid file:border-rule-strong file:bg-transparent file:px-3.5 file:text-sm file:font-medium file:text-ink"
-            />
-            {fault && <span className="mt-2 block font-medium text-wont">{fault}</span>}
-            {preview.isPending && <span className="mt-2 block text-ink-2">Reading</span>}
-          </label>
         )}
       </Dialog>
     </>

@@ -1,24 +1,24 @@
 import { Select } from '@/components/select.tsx';
-import type { SurveyPreview } from '@/lib/contract.ts';
-import { unitsOf, columnUse, USES, withUnit, withUse, type OpenMapping } from './mapping.ts';
+import type { OpenSurveyMapping, SurveyPreview } from '@/lib/contract.ts';
+import { columnUse, unitsOf, USES, withUnit, withUse } from './mapping.ts';
 
 interface ColumnTableProps {
   columns: SurveyPreview['columns'];
-  mapping: OpenMapping;
-  onChange: (mapping: OpenMapping) => void;
+  mapping: OpenSurveyMapping;
+  onChange: (mapping: OpenSurveyMapping) => void;
 }
 
 /** What each column of the table is, and in which unit. */
 export function ColumnTable({ columns, mapping, onChange }: ColumnTableProps) {
   return (
-    <ul className="max-h-80 overflow-y-auto border-y border-rule">
+    <ul className="max-h-96 overflow-y-auto border-y border-rule">
       {columns.map(({ name, examples }) => {
         const use = columnUse(mapping, name);
         const measure = mapping.measures.find(({ column }) => column === name);
         return (
           <li
             key={name}
-            className="grid items-end gap-3 border-b border-rule py-2 phone:grid-cols-[minmax(0,1fr)_13rem_6rem]"
+            className="grid items-end gap-3 border-b border-rule py-2 phone:grid-cols-[minmax(0,1fr)_16rem_6rem]"
           >
             <p className="min-w-0 self-center">
               <span className="block truncate font-medium">{name}</span>
@@ -30,7 +30,7 @@ export function ColumnTable({ columns, mapping, onChange }: ColumnTableProps) {
               options={USES}
               onChange={(next) => onChange(withUse(mapping, name, next))}
             />
-            {measure && (
+            {measure?.unit && (
               <Select
                 label="in"
                 value={measure.unit}
