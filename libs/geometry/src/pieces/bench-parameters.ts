@@ -1,4 +1,6 @@
 import type { PieceOf } from '../room/document.ts';
+import { endParameters, endsMm, THINNEST_INNER_MM } from './bench-end-parameters.ts';
+import { hasBack, PADDING_PARAMETERS } from './bench-padding-parameters.ts';
 import type { ParameterSpec } from './kind.ts';
 import { pressedSeatHeightMm, referenceSinkMm, withPressedSeatHeight } from './seat-sink.ts';
 
@@ -6,21 +8,13 @@ type Bench = PieceOf<'bench'>;
 type BenchParameter = ParameterSpec<'bench'>;
 
 const NARROWEST_PLACE_MM = 300;
-const THINNEST_INNER_MM = 250;
 
-const hasBack = (bench: Bench) => bench.backHeightMm > 0;
 const isBox = (bench: Bench) => bench.base === 'box';
 
 const ON_OFF_BASE = [
   { value: 'box', label: 'closed box' },
   { value: 'open', label: 'open legs' },
 ] as const;
-const END_KINDS = [
-  { value: 'open', label: 'open' },
-  { value: 'arm', label: 'arm' },
-  { value: 'wall', label: 'end wall' },
-] as const;
-
 /** Dimensions and choices of a bench, in the order of the form. */
 export const BENCH_PARAMETERS: readonly BenchParameter[] = [
   {
@@ -80,61 +74,7 @@ export const BENCH_PARAMETERS: readonly BenchParameter[] = [
     group: 'more',
     describes: 'from level, front edge up',
   },
-  {
-    key: 'seatCushion.thicknessMm',
-    label: 'Seat cushion',
-    kind: 'length',
-    group: 'more',
-    describes: 'thickness unpressed; the pressed seat height stays',
-    write: (bench, value) =>
-      withPressedSeatHeight(
-        { ...bench, seatCushion: { ...bench.seatCushion, thicknessMm: Number(value) } },
-        pressedSeatHeightMm(bench),
-      ),
-  },
-  {
-    key: 'seatCushion.foam.ifd25N',
-    label: 'Seat foam firmness',
-    kind: 'count',
-    unit: 'N',
-    group: 'more',
-    describes: 'force that presses the foam by a quarter; the pressed seat height stays',
-    write: (bench, value) => {
-      const foam = { ...bench.seatCushion.foam, ifd25N: Number(value) };
-      const seatCushion = { ...bench.seatCushion, foam };
-      return withPressedSeatHeight({ ...bench, seatCushion }, pressedSeatHeightMm(bench));
-    },
-  },
-  {
-    key: 'backCushion.thicknessMm',
-    label: 'Back cushion',
-    kind: 'length',
-    group: 'more',
-    describes: 'thickness unpressed, square to the back',
-    applies: hasBack,
-  },
-  {
-    key: 'lumbar.apexMm',
-    label: 'Back curve',
-    kind: 'length',
-    group: 'more',
-    describes: 'pressed seat to where the back stands out most; 0 for a flat back',
-    applies: hasBack,
-    read: (bench) => bench.lumbar?.apexMm ?? 0,
-    write: (bench, value) => withLumbar(bench, { apexMm: Number(value) }),
-    limits: () => ({ min: 0, max: 400 }),
-  },
-  {
-    key: 'lumbar.recessMm',
-    label: 'Pelvis room',
-    kind: 'length',
-    group: 'more',
-    describes: 'how far the back gives way between 100 and 200 mm above the pressed seat; 0 for none',
-    applies: hasBack,
-    read: (bench) => bench.lumbar?.recessMm ?? 0,
-    write: (bench, value) => withLumbar(bench, { recessMm: Number(value) }),
-    limits: () => ({ min: 0, max: 150 }),
-  },
+  ...PADDING_PARAMETERS,
   {
     key: 'places.count',
     label: 'Places',
@@ -246,49 +186,3 @@ export const BENCH_PARAMETERS: readonly BenchParameter[] = [
     describes: 'a longer run is split into equal cushions',
   },
 ];
-
-const FLAT = { apexMm: 0, recessMm: 0 };
-
-const withLumbar = (bench: Bench, change: Partial<typeof FLAT>): Bench => ({
-  ...bench,
-  lumbar: { ...FLAT, ...bench.lumbar, ...change },
-});
-
-function endsMm(bench: Bench): number {
-  return bench.ends.left.thicknessMm + bench.ends.right.thicknessMm;
-}
-
-function endParameters(side: 'left' | 'right'): BenchParameter[] {
-  const hand = `${side === 'left' ? 'Left' : 'Right'} end`;
-  return [
-    {
-      key: `ends.${side}.kind`,
-      label: hand,
-      kind: 'choice',
-      group: 'more',
-      describes: `what closes the ${side} end, as seen from in front`,
-      choices: END_KINDS,
-    },
-    {
-      key: `ends.${side}.thicknessMm`,
-      label: `${hand} thickness`,
-      kind: 'length',
-      group: 'more',
-      describes: 'thickness of the arm, wall or moulding',
-      limits: (bench) => ({
-        max: Math.max(
-          0,
-          Math.min(200, bench.lengthMm - THINNEST_INNER_MM - endsMm(bench) + bench.ends[side].thicknessMm),
-        ),
-      }),
-    },
-    {
-      key: `ends.${side}.heightMm`,
-      label: `${hand} height`,
-      kind: 'length',
-      group: 'more',
-      describes: 'pressed seat to the top of the arm or wall',
-      applies: (bench) => bench.ends[side].kind !== 'open',
-    },
-  ];
-}
