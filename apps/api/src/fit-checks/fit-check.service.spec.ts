@@ -122,4 +122,18 @@ describe('what to measure next', () => {
     const changed = { ...document, asked: { ...document.asked, lensHeightMm: 1200 } };
     expect(await ask(changed)).toEqual({ found: [HETTY.id], left: 0, leftOut: [other.id] });
   });
+
+  it('is worked out once when it is asked twice at once', async () => {
+    const document = withSitters(mannequin(10), { kind: 'cast', castId: HETTY.id });
+    const ask = async () => {
+      const turns: Turns = { left: 1, leftOut: [] };
+      const found = [];
+      for await (const one of fit.measureNext(document, [HETTY], null, turns)) found.push(one);
+      return { found, left: turns.left };
+    };
+    const [one, other] = await Promise.all([ask(), ask()]);
+    expect(other.found).toEqual(one.found);
+    expect(one.found).toHaveLength(1);
+    expect([one.left, other.left].sort()).toEqual([0, 1]);
+  });
 });

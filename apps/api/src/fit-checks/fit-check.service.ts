@@ -78,8 +78,12 @@ export class FitCheckService {
           turns.leftOut.push(sitter.id);
           continue;
         }
-        turns.left -= 1;
         await setImmediate();
+        // Somebody who asked for the same a moment ago may have worked it out meanwhile.
+        next = this.recent.get(key);
+      }
+      if (!next) {
+        turns.left -= 1;
         next = nextMeasures({
           person: sitter.person,
           model,
