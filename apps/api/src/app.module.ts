@@ -21,6 +21,7 @@ import { ProductionsModule } from './productions/productions.module';
 import { RateLimitsModule } from './rate-limits/rate-limits.module';
 import { SetsModule } from './sets/sets.module';
 import { StudiesModule } from './studies/studies.module';
+import { SuggestionsModule } from './suggestions/suggestions.module';
 import { UpholsterersModule } from './upholsterers/upholsterers.module';
 import { UsersModule } from './users/users.module';
 import { WorkshopsModule } from './workshops/workshops.module';
@@ -47,6 +48,7 @@ import { WorkshopsModule } from './workshops/workshops.module';
     SetsModule,
     PopulationsModule,
     StudiesModule,
+    SuggestionsModule,
     UpholsterersModule,
     CushionOrdersModule,
     DemoModule,

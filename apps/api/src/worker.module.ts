@@ -8,6 +8,9 @@ import { StudyCountingModule } from './studies/study-counting.module';
 import { StudyWork } from './studies/study-work';
 import { JobWorker, type Work } from './jobs/job-worker';
 import { Jobs } from './jobs/jobs.service';
+import { SearchWork } from './suggestions/search-work';
+import { Searcher } from './suggestions/searcher';
+import { SearchingModule } from './suggestions/searching.module';
 
 /** A process that counts studies and searches for dimensions, and answers no requests. */
 @Module({
@@ -19,12 +22,15 @@ import { Jobs } from './jobs/jobs.service';
     }),
     DatabaseModule,
     StudyCountingModule,
+    SearchingModule,
   ],
   providers: [
     StudyWork,
+    Searcher,
+    SearchWork,
     {
       provide: JobWorker,
-      inject: [Jobs, StudyWork],
+      inject: [Jobs, StudyWork, SearchWork],
       useFactory: (jobs: Jobs, ...kinds: Work[]) => new JobWorker(jobs, kinds),
     },
   ],

@@ -5,7 +5,7 @@ import { createProduction, createSet } from './factories/productions';
 import { startWorkerOf } from './factories/workers';
 import { startAppOn, startTestApp, type TestApp } from './test-app';
 
-jest.setTimeout(60_000);
+jest.setTimeout(120_000);
 
 /** A server of each version, on one database, as while one is replaced by the other. */
 const servers = new Map<string, TestApp>();
@@ -32,14 +32,21 @@ afterAll(async () => {
 
 const KINDS = {
   studies: { populationId: 'british', people: 200, draftNumber: 1 },
+  suggestions: {
+    populationId: 'british',
+    free: [{ dimensionId: 'seat-tilt', tolerance: 1 }],
+    draftNumber: 1,
+  },
 } as const;
 type Kind = keyof typeof KINDS;
 
+let asked = 0;
+/** Each a question of its own, for the same one is not begun twice. */
 const begin = async (version: string, kind: Kind): Promise<string> =>
   (
     await as(server(version), owner)
       .post(`${setPath}/${kind}`)
-      .send(KINDS[kind])
+      .send({ ...KINDS[kind], womenPercent: (asked += 1) })
       .expect(({ status }) => expect([201, 202]).toContain(status))
   ).body.id as string;
 const look = async (kind: Kind, id: string): Promise<{ state: string; fault?: string }> =>

@@ -82,6 +82,8 @@ export interface Settings {
   studyBlockPeople: number;
   /** Studies that take no longer than this by estimate are counted before the request is answered. */
   studyAtOnceMs: number;
+  /** For so long a worker searches for dimensions before it keeps what it tried and looks for other work. */
+  searchPartMs: number;
   /** For so long a block is a worker's; then its worker is taken for lost and another gets it. */
   blockTimeoutSeconds: number;
   cookieSecure: boolean;
@@ -115,6 +117,7 @@ export function readSettings(env: NodeJS.ProcessEnv, role: 'server' | 'worker' =
     mailPollMs: 2000,
     studyBlockPeople: 40_000,
     studyAtOnceMs: 500,
+    searchPartMs: 1000,
     blockTimeoutSeconds: values.STUDY_BLOCK_TIMEOUT_SECONDS,
     cookieSecure: values.COOKIE_SECURE ?? publicUrl.startsWith('https://'),
     logLevel: values.LOG_LEVEL,

@@ -21,6 +21,8 @@ import { SetNote } from '../sets/entities/set-note.entity';
 import { SetRevision } from '../sets/entities/set-revision.entity';
 import { Study } from '../studies/entities/study.entity';
 import { StudyBlock } from '../studies/entities/study-block.entity';
+import { DimensionSearch } from '../suggestions/entities/dimension-search.entity';
+import { SearchTries } from '../suggestions/entities/search-tries.entity';
 import { Upholsterer } from '../upholsterers/entities/upholsterer.entity';
 import { User } from '../users/entities/user.entity';
 import { Membership } from '../workshops/entities/membership.entity';
@@ -33,6 +35,7 @@ export const ENTITIES = [
   CastMember,
   CushionOrder,
   DesignedSet,
+  DimensionSearch,
   Invitation,
   MailedToken,
   Membership,
@@ -46,6 +49,7 @@ export const ENTITIES = [
   Production,
   RefreshToken,
   RevisionApproval,
+  SearchTries,
   Session,
   SetDraft,
   SetNote,

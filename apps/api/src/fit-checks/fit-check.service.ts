@@ -103,7 +103,8 @@ export class FitCheckService {
       .map(({ placeId, person }) => roundedBody(placeId, person, this.model.predict(person).means()));
   }
 
-  private sitters(document: SetDocument, cast: readonly CastPerson[]): Sitter[] {
+  /** Whoever sits at a place, with what is known of them. */
+  sitters(document: SetDocument, cast: readonly CastPerson[]): Sitter[] {
     const people = new Map(cast.map((person) => [person.id, person]));
     return document.seating.flatMap(({ pieceId, place, sitter }): Sitter[] => {
       const placeId = `${pieceId}:${place}`;

@@ -48,23 +48,29 @@ export function readQuestion(
 const RULES = PERSON_CHECKS.map(({ id }) => id);
 
 function placeFaults(asked: string[] | undefined, places: PlaceSituation[]): ProblemField[] {
-  if (places.length === 0) {
-    const message = 'the set has no place to sit at; accepted: a set with a bench or a loose seat';
-    return [{ path: 'placeIds', code: 'no-places', message }];
-  }
-  const unlike = unlikePlaces(places).length;
-  if (unlike > MOST_UNLIKE_PLACES) {
-    const message = `the set has ${unlike} kinds of places; accepted: up to ${MOST_UNLIKE_PLACES}`;
-    return [{ path: 'placeIds', code: 'too-many-places', message }];
-  }
+  const none = seatFaults('placeIds', places);
+  if (none.length > 0) return none;
   const ids = places.map(({ placeId }) => placeId);
   return strangers('placeIds', asked, ids, 'no place of the set has the id');
 }
 
-function strangers(
+/** A set without a place, or with more kinds of them than are counted. */
+export function seatFaults(path: string, places: PlaceSituation[]): ProblemField[] {
+  if (places.length === 0) {
+    const message = 'the set has no place to sit at; accepted: a set with a bench or a loose seat';
+    return [{ path, code: 'no-places', message }];
+  }
+  const unlike = unlikePlaces(places).length;
+  if (unlike <= MOST_UNLIKE_PLACES) return [];
+  const message = `the set has ${unlike} kinds of places; accepted: up to ${MOST_UNLIKE_PLACES}`;
+  return [{ path, code: 'too-many-places', message }];
+}
+
+/** Ids that name nothing. */
+export function strangers(
   path: string,
-  asked: string[] | undefined,
-  known: string[],
+  asked: readonly string[] | undefined,
+  known: readonly string[],
   words: string,
 ): ProblemField[] {
   return (asked ?? []).flatMap((id, at) =>
@@ -81,7 +87,7 @@ function strangers(
 }
 
 /** A population of one sex is not mixed. */
-function mixFaults(womenPercent: number | undefined, groups: readonly string[]): ProblemField[] {
+export function mixFaults(womenPercent: number | undefined, groups: readonly string[]): ProblemField[] {
   const [only, other] = groups;
   if (womenPercent === undefined || other !== undefined) return [];
   const accepted = only === 'women' ? WHOLE : 0;

@@ -1,4 +1,3 @@
-import type { SetDocument } from '@settlewright/geometry';
 import { Injectable } from '@nestjs/common';
 import { InjectRepository } from '@nestjs/typeorm';
 import { type EntityManager, In, type Repository, type SelectQueryBuilder } from 'typeorm';
@@ -6,20 +5,22 @@ import { AuditService } from '../audit/audit.service';
 import type { MemberInfo } from '../common/access.decorator';
 import { Problem } from '../common/problem';
 import { InjectSettings, type Settings } from '../config/settings';
+import { UNFINISHED } from '../jobs/job-states';
 import { WorkVersion } from '../jobs/work-version';
-import { crowdFrom } from '../populations/crowd-data';
 import { PopulationsService } from '../populations/populations.service';
 import { DraftsService } from '../sets/drafts.service';
 import { RevisionsService } from '../sets/revisions.service';
 import { SetAccess } from '../sets/set-access';
+import { askedDocument } from './asked-document';
 import { resultOf } from './count-block';
 import type { StartStudyDto } from './dto/start-study.dto';
-import { Study, UNFINISHED } from './entities/study.entity';
+import { Study } from './entities/study.entity';
 import { readQuestion } from './read-question';
 import { locked, StudyBlocks } from './study-blocks.service';
 import { StudyCounter } from './study-counter';
 import { blocksOf, type StudyQuestion } from './study-question';
 import { StudyQueue } from './study-queue';
+import { toldPopulation } from './told-population';
 
 const LISTED = 20;
 /** So that one workshop does not keep the others waiting. */
@@ -38,8 +39,8 @@ export class StudiesService {
     @InjectRepository(Study) private readonly studies: Repository<Study>,
     @InjectSettings() private readonly config: Settings,
     private readonly access: SetAccess,
-    private readonly drafts: DraftsService,
-    private readonly revisions: RevisionsService,
+    readonly drafts: DraftsService,
+    readonly revisions: RevisionsService,
     private readonly populations: PopulationsService,
     private readonly counter: StudyCounter,
     private readonly blocks: StudyBlocks,
@@ -51,7 +52,7 @@ export class StudiesService {
   /** A short study is counted here and now, a long one by the workers. */
   async start(member: MemberInfo, productionId: string, setId: string, dto: StartStudyDto): Promise<Study> {
     await this.access.forChanging(member, productionId, setId);
-    const document = await this.document(member, productionId, setId, dto);
+    const document = await askedDocument(this, member, productionId, setId, dto);
     const crowd = await this.populations.crowd(member.workshopId, dto.populationId);
     const question = readQuestion(dto, document, crowd, {
       blockPeople: this.config.studyBlockPeople,
@@ -110,37 +111,13 @@ export class StudiesService {
     });
   }
 
-  private async document(
-    member: MemberInfo,
-    productionId: string,
-    setId: string,
-    { draftNumber, revisionLetter }: StartStudyDto,
-  ): Promise<SetDocument> {
-    const given = [draftNumber, revisionLetter].filter((one) => one !== undefined && one !== null);
-    if (given.length !== 1) {
-      const read = given.length === 0 ? 'neither' : 'both';
-      const message = `read ${read}; accepted: the number of the draft or the letter of a revision`;
-      throw Problem.invalid([{ path: 'draftNumber', code: 'one-document', message }]);
-    }
-    if (typeof revisionLetter === 'string') {
-      return (await this.revisions.find(member, productionId, setId, revisionLetter)).document;
-    }
-    const draft = await this.drafts.get(member, productionId, setId);
-    if (draft.number !== draftNumber) {
-      const detail = `Draft ${draftNumber} was to be studied, but the set is at draft ${draft.number}.`;
-      throw Problem.conflict('draft-moved-on', detail, { currentNumber: draft.number });
-    }
-    return draft.document;
-  }
-
   private begun(member: MemberInfo, setId: string, dto: StartStudyDto, question: StudyQuestion): Study {
-    const { name, kind, source, licence, cautions } = crowdFrom(question.crowd);
     const { womenShare, people, seed, ruleVersion } = question;
     return this.studies.create({
       setId,
       draftNumber: dto.draftNumber ?? null,
       revisionLetter: dto.revisionLetter?.toUpperCase() ?? null,
-      population: { id: question.crowd.id, name, kind, source, licence, cautions: [...cautions] },
+      population: toldPopulation(question.crowd),
       womenPercent: womenShare === undefined ? null : (dto.womenPercent ?? womenShare * 100),
       people,
       seed,

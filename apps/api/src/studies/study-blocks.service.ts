@@ -3,11 +3,12 @@ import { Injectable } from '@nestjs/common';
 import { InjectDataSource } from '@nestjs/typeorm';
 import { DataSource, type EntityManager } from 'typeorm';
 import { ABANDONED, abandonedIds } from '../jobs/abandoned';
+import { UNFINISHED } from '../jobs/job-states';
 import { WorkVersion } from '../jobs/work-version';
 import { studyCrowd, type StudyQuestion } from './study-question';
 import { resultOf } from './count-block';
 import { StudyBlock } from './entities/study-block.entity';
-import { Study, UNFINISHED } from './entities/study.entity';
+import { Study } from './entities/study.entity';
 
 /** Keeps what was counted, each block once, and puts the study together when the last one is in. */
 @Injectable()

@@ -34,6 +34,10 @@ export function bodiesFor(shop: Shop): Record<string, object> {
     [`PATCH ${S}/notes/{noteId}`]: { resolved: true },
     [`PUT ${S}/built`]: { partId: shop.partId, built: true },
     [`POST ${S}/studies`]: { populationId: 'british', people: 100, revisionLetter: letter },
+    [`POST ${S}/suggestions`]: {
+      free: [{ dimensionId: 'seat-depth', tolerance: 25 }],
+      revisionLetter: letter,
+    },
     [`POST ${W}/populations/preview`]: { csv: surveyCsv() },
     [`POST ${W}/populations`]: surveyBody({ name: 'More colleagues' }),
     [`POST ${W}/upholsterers`]: { name: 'Another', email },

@@ -94,6 +94,12 @@ export const EXPECTED_ACCESS: Record<string, AccessRule> = {
   [`POST ${S}/studies/{studyId}/cancel`]: MAKERS,
   [`DELETE ${S}/studies/{studyId}`]: MAKERS,
 
+  [`GET ${S}/suggestions`]: EVERY_MEMBER,
+  [`POST ${S}/suggestions`]: MAKERS,
+  [`GET ${S}/suggestions/{suggestionId}`]: EVERY_MEMBER,
+  [`POST ${S}/suggestions/{suggestionId}/cancel`]: MAKERS,
+  [`DELETE ${S}/suggestions/{suggestionId}`]: MAKERS,
+
   [`GET ${W}/populations`]: EVERY_MEMBER,
   [`POST ${W}/populations`]: MAKERS,
   [`POST ${W}/populations/preview`]: MAKERS,

@@ -83,6 +83,11 @@ export async function createShop(test: TestApp, name: string): Promise<Shop> {
     people: 200,
     draftNumber: draft.number,
   });
+  const suggestion = await make(
+    `${S}/suggestions`,
+    { free: [{ dimensionId: 'seat-height', tolerance: 50 }], draftNumber: draft.number },
+    202,
+  );
   const invitation = await make(`${W}/invitations`, {
     email: `guest-${workshopId}@people.test`,
     role: 'reviewer',
@@ -100,6 +105,7 @@ export async function createShop(test: TestApp, name: string): Promise<Shop> {
       letter: revision.letter,
       noteId: note.id,
       studyId: study.id,
+      suggestionId: suggestion.id,
       populationId: population.id,
       upholstererId: upholsterer.id,
       orderId: order.id,

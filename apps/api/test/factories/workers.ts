@@ -10,6 +10,7 @@ import type { TestApp } from '../test-app';
 /** For so long a block is a worker's in these tests. */
 export const BLOCK_TIMEOUT_SECONDS = 3;
 
+const SEARCHED = /part \d+ of search ([0-9a-f-]+) done, from choice (\d+)/g;
 const COUNTED = /block (\d+) of study ([0-9a-f-]+) counted/g;
 
 /** A worker in a process of its own, as `npm run worker` starts it. */
@@ -39,6 +40,13 @@ export class WorkerProcess {
     return [...this.said.matchAll(COUNTED)]
       .filter(([, , id]) => id === studyId)
       .map(([, block]) => Number(block));
+  }
+
+  /** Choices that were known when this process took up each part of a search. */
+  wentOnFrom(searchId: string): number[] {
+    return [...this.said.matchAll(SEARCHED)]
+      .filter(([, id]) => id === searchId)
+      .map(([, , known]) => Number(known));
   }
 
   get words(): string {

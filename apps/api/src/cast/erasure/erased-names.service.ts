@@ -9,6 +9,7 @@ import { populationTexts } from '../../populations/population-texts';
 import { productionTexts } from '../../productions/production-texts';
 import { SetTexts } from '../../sets/set-texts.service';
 import { studyTexts } from '../../studies/study-texts';
+import { searchTexts } from '../../suggestions/search-erasure';
 import { CastService } from '../cast.service';
 import type { NamedPlaceDto, NamedPlacesDto } from './named-places.dto';
 
@@ -77,9 +78,10 @@ export class ErasedNames {
     yield* await this.cast.textsOfOthers(manager, productionId, castId);
     yield* this.sets.of(manager, member, productionId, options);
     yield* this.orders.of(manager, productionId);
-    // Populations belong to the whole workshop, and so do the words that its studies copied from them.
+    // Populations belong to the whole workshop, and so do the words that studies and searches copied from them.
     yield* populationTexts(manager, member.workshopId);
     yield* studyTexts(manager, member.workshopId, options);
+    yield* searchTexts(manager, member.workshopId);
   }
 }
 

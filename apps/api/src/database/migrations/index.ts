@@ -7,6 +7,7 @@ import { ConfidenceOfAWorkshop1796157600000 } from './1796157600000-confidence-o
 import { ErasedNames1796158800000 } from './1796158800000-erased-names';
 import { PopulationsAndStudies1796161490650 } from './1796161490650-populations-and-studies';
 import { AgeOfCastMembers1796165200000 } from './1796165200000-age-of-cast-members';
+import { DimensionSearches1796170200000 } from './1796170200000-dimension-searches';
 
 /** In the order in which they run. What is merged is never changed. */
 export const MIGRATIONS: (new () => MigrationInterface)[] = [
@@ -18,4 +19,5 @@ export const MIGRATIONS: (new () => MigrationInterface)[] = [
   ErasedNames1796158800000,
   PopulationsAndStudies1796161490650,
   AgeOfCastMembers1796165200000,
+  DimensionSearches1796170200000,
 ];

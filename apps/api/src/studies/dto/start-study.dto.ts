@@ -11,6 +11,7 @@ import {
   MaxLength,
   Min,
 } from 'class-validator';
+import { AskedDocumentDto } from './asked-document.dto';
 
 const MOST_PEOPLE = 1_000_000;
 const FEWEST_PEOPLE = 100;
@@ -19,7 +20,7 @@ const ID_MAX = 80;
 const RULES_MAX = 100;
 const PLACES_MAX = 1000;
 
-export class StartStudyDto {
+export class StartStudyDto extends AskedDocumentDto {
   @ApiProperty({
     description: 'one that comes with the product, as `us-civilians-2015`, or one of the workshop’s own',
   })
@@ -71,19 +72,4 @@ export class StartStudyDto {
   @IsString({ each: true })
   @MaxLength(ID_MAX, { each: true })
   placeIds?: string[];
-
-  @ApiPropertyOptional({
-    minimum: 1,
-    description: 'the draft that was seen; either this or `revisionLetter`',
-  })
-  @IsOptional()
-  @IsInt()
-  @Min(1)
-  draftNumber?: number;
-
-  @ApiPropertyOptional({ description: 'an issued revision' })
-  @IsOptional()
-  @IsString()
-  @MaxLength(ID_MAX)
-  revisionLetter?: string;
 }

@@ -3,7 +3,8 @@ import { ApiProperty, ApiPropertyOptional } from '@nestjs/swagger';
 import { seesMeasures } from '../../cast/sees-measures';
 import type { MemberInfo } from '../../common/access.decorator';
 import { PersonDto } from '../../sets/dto/person.dto';
-import { STUDY_STATES, type Study, type StudyState } from '../entities/study.entity';
+import { JOB_STATES, type JobState } from '../../jobs/job-states';
+import type { Study } from '../entities/study.entity';
 import type { StudyResult } from '../study-question';
 
 export class ToldPopulationDto {
@@ -31,8 +32,8 @@ export class StudyProgressDto {
 export class ListedStudyDto {
   @ApiProperty({ format: 'uuid' })
   id: string;
-  @ApiProperty({ enum: STUDY_STATES })
-  state: StudyState;
+  @ApiProperty({ enum: JOB_STATES })
+  state: JobState;
   @ApiProperty({ type: StudyProgressDto })
   progress: StudyProgressDto;
   @ApiPropertyOptional({ description: 'of the document; either this or `revisionLetter`' })

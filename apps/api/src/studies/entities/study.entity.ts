@@ -1,4 +1,4 @@
-import type { PopulationKind, ShareOutcome } from '@settlewright/anthropometry';
+import type { ShareOutcome } from '@settlewright/anthropometry';
 import {
   Column,
   CreateDateColumn,
@@ -9,23 +9,11 @@ import {
   PrimaryGeneratedColumn,
   type Relation,
 } from 'typeorm';
+import type { JobState } from '../../jobs/job-states';
 import { DesignedSet } from '../../sets/entities/designed-set.entity';
 import { User } from '../../users/entities/user.entity';
 import type { StudyQuestion, StudyResult } from '../study-question';
-
-export const STUDY_STATES = ['queued', 'running', 'done', 'cancelled', 'failed'] as const;
-export type StudyState = (typeof STUDY_STATES)[number];
-export const UNFINISHED: readonly StudyState[] = ['queued', 'running'];
-
-/** What is told of the people, whatever becomes of the population later. */
-export interface ToldPopulation {
-  id: string;
-  name: string;
-  kind: PopulationKind;
-  source: string;
-  licence: string;
-  cautions: string[];
-}
+import type { ToldPopulation } from '../told-population';
 
 /** How many people of a population one document of a set fits. */
 @Entity('studies')
@@ -71,7 +59,7 @@ export class Study {
   ruleVersion: string;
 
   @Column('text')
-  state: StudyState;
+  state: JobState;
 
   @Column('integer')
   blocks: number;

@@ -1,0 +1,72 @@
+import { type EntityManager, In } from 'typeorm';
+import type { MemberInfo } from '../common/access.decorator';
+import { Problem } from '../common/problem';
+import { UNFINISHED } from '../jobs/job-states';
+import { toldPopulation } from '../studies/told-population';
+import type { StartSuggestionDto } from './dto/start-suggestion.dto';
+import { DimensionSearch } from './entities/dimension-search.entity';
+import type { SearchQuestion, ToldDimension, ToldSitter } from './search-question';
+
+/** Searches of one set that are kept and listed. */
+export const LISTED = 20;
+/** So that one workshop does not keep the others waiting. */
+const MOST_UNFINISHED = 5;
+const WHOLE = 100;
+
+/** A row for a search that waits for a worker. */
+export function begunSearch(
+  { userId }: MemberInfo,
+  setId: string,
+  { draftNumber, revisionLetter }: StartSuggestionDto,
+  { question, told, digest }: { question: SearchQuestion; told: ToldDimension[]; digest: string },
+): Partial<DimensionSearch> {
+  const { crowd } = question;
+  const sitters = new Map(
+    question.sitters.map(({ kind, id, name }): [string, ToldSitter] => [
+      id,
+      kind === 'cast' ? { kind, id } : { kind, id, name },
+    ]),
+  );
+  return {
+    setId,
+    draftNumber: draftNumber ?? null,
+    revisionLetter: revisionLetter?.toUpperCase() ?? null,
+    free: told,
+    served: [...sitters.values()],
+    population: crowd ? toldPopulation(crowd.crowd) : null,
+    womenPercent: crowd?.womenShare === undefined ? null : crowd.womenShare * WHOLE,
+    state: 'queued',
+    done: 0,
+    most: 0,
+    part: 0,
+    question,
+    digest,
+    found: null,
+    fault: null,
+    startedById: userId,
+    endedAt: null,
+  };
+}
+
+/**
+ * Part of the caller's transaction, which keeps the workshop, so that two at once are counted one by one. Refuses when
+ * too many are not done; of the set's ended ones, the oldest go.
+ */
+export async function makeRoom(manager: EntityManager, workshopId: string, setId: string): Promise<void> {
+  const unfinished = await manager
+    .createQueryBuilder(DimensionSearch, 'search')
+    .innerJoin('search.set', 'set')
+    .innerJoin('set.production', 'production')
+    .where('production.workshopId = :workshopId', { workshopId })
+    .andWhere({ state: In([...UNFINISHED]) })
+    .getCount();
+  if (unfinished >= MOST_UNFINISHED) {
+    const detail = `${unfinished} searches of this workshop are not done yet; accepted: up to ${MOST_UNFINISHED} at a time.`;
+    throw Problem.conflict('too-many-searches', detail);
+  }
+  await manager.query(
+    `DELETE FROM dimension_searches WHERE set_id = $1 AND ended_at IS NOT NULL AND id NOT IN (
+       SELECT id FROM dimension_searches WHERE set_id = $1 ORDER BY started_at DESC, id LIMIT $2)`,
+    [setId, LISTED - 1],
+  );
+}
