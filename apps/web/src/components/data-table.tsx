@@ -40,8 +40,8 @@ export interface DataColumn<Row> {
   cell: (row: Row) => ReactNode;
   align?: 'left' | 'right';
   sortable?: boolean;
-  /** Left out on a phone, where each row reads as a small list. */
-  quietOnPhone?: boolean;
+  /** Left out on a phone, where each row reads as a small list: always, or where a row has nothing to say there. */
+  quietOnPhone?: boolean | ((row: Row) => boolean);
 }
 
 interface DataTableProps<Row extends RowData> {
@@ -58,6 +58,9 @@ interface DataTableProps<Row extends RowData> {
   /** Stands to the right of the filter. */
   tools?: ReactNode;
 }
+
+const quietOnPhone = <Row,>(column: DataColumn<Row> | undefined, row: Row): boolean =>
+  typeof column?.quietOnPhone === 'function' ? column.quietOnPhone(row) : column?.quietOnPhone === true;
 
 /** Rows that sort, filter and page; on a phone each row becomes a small list. */
 export function DataTable<Row extends RowData>({
@@ -102,9 +105,9 @@ export function DataTable<Row extends RowData>({
   return (
     <div>
       {(filterLabel !== undefined || tools !== undefined) && (
-        <div className="mb-3 flex flex-wrap items-center justify-between gap-3">
+        <div className="mb-3 flex flex-wrap items-center justify-between gap-3 max-tablet:flex-col max-tablet:items-stretch">
           {filterLabel !== undefined && (
-            <label className="flex h-10 min-w-0 flex-1 items-center gap-2 border-b-[1.5px] border-rule-strong text-ink-2 focus-within:border-chalk tablet:max-w-80">
+            <label className="flex h-10 min-w-0 items-center tablet:flex-1 gap-2 border-b-[1.5px] border-rule-strong text-ink-2 focus-within:border-chalk tablet:max-w-80">
               <SearchIcon />
               <span className="sr-only">{filterLabel}</span>
               <input
@@ -187,7 +190,7 @@ export function DataTable<Row extends RowData>({
                     className={classNames(
                       'py-2.5 pr-4 last:pr-0 max-tablet:flex max-tablet:justify-between max-tablet:gap-4 max-tablet:py-0 max-tablet:pr-0 max-tablet:text-right',
                       column?.align === 'right' && 'text-right',
-                      column?.quietOnPhone && 'max-tablet:hidden',
+                      quietOnPhone(column, row.original) && 'max-tablet:hidden',
                     )}
                   >
                     <span aria-hidden="true" className="text-sm text-ink-3 tablet:hidden">

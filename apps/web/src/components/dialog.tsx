@@ -5,11 +5,12 @@ import {
   DialogPanel,
   DialogTitle,
 } from '@headlessui/react';
-import type { FormEvent, ReactNode } from 'react';
+import { useState, type FormEvent, type ReactNode } from 'react';
 import { Button } from './button.tsx';
 import { classNames } from './class-names.ts';
 import { CloseIcon } from './icons.tsx';
 import { Notice } from './notice.tsx';
+import { useTyped } from './use-typed.ts';
 
 interface DialogProps {
   open: boolean;
@@ -18,17 +19,31 @@ interface DialogProps {
   /** What will happen, in a sentence. */
   describe?: ReactNode;
   wide?: boolean;
+  /** What is typed here is lost by closing: Escape, a press outside and the cross ask first. */
+  losesTyping?: boolean;
   children: ReactNode;
 }
 
 /** A slip over the page that holds the focus until it is answered. */
-export function Dialog({ open, onClose, title, describe, wide = false, children }: DialogProps) {
+export function Dialog({
+  open,
+  onClose,
+  title,
+  describe,
+  wide = false,
+  losesTyping = false,
+  children,
+}: DialogProps) {
+  const { onFocus, isTyped } = useTyped(open);
+  const [asking, setAsking] = useState(false);
+  const leave = () => (losesTyping && isTyped() ? setAsking(true) : onClose());
   return (
-    <HeadlessDialog open={open} onClose={onClose} className="relative z-40">
+    <HeadlessDialog open={open} onClose={leave} className="relative z-40">
       <DialogBackdrop className="fixed inset-0 bg-[rgb(35_29_22/0.4)]" />
       <div className="fixed inset-0 overflow-y-auto">
         <div className="flex min-h-full items-start justify-center p-4 max-phone:items-end max-phone:p-0 tablet:pt-[10vh]">
           <DialogPanel
+            onFocus={onFocus}
             className={classNames(
               'relative w-full rounded-md bg-sheet p-6 shadow-slip tablet:p-8',
               wide ? 'max-w-[60rem]' : 'max-w-[34rem]',
@@ -38,7 +53,7 @@ export function Dialog({ open, onClose, title, describe, wide = false, children 
               <DialogTitle className="text-xl font-light tracking-hero text-balance">{title}</DialogTitle>
               <button
                 type="button"
-                onClick={onClose}
+                onClick={leave}
                 aria-label="Close"
                 className="quick -mt-1 -mr-2 flex size-9 items-center justify-center rounded-sm text-ink-2 hover:bg-sunk hover:text-ink"
               >
@@ -54,7 +69,32 @@ export function Dialog({ open, onClose, title, describe, wide = false, children 
           </DialogPanel>
         </div>
       </div>
+      {asking && (
+        <AskFirst
+          onKeep={() => setAsking(false)}
+          onDiscard={() => {
+            setAsking(false);
+            onClose();
+          }}
+        />
+      )}
     </HeadlessDialog>
+  );
+}
+
+/** Stands over a dialog that is about to be closed with something typed in it. */
+function AskFirst({ onKeep, onDiscard }: { onKeep: () => void; onDiscard: () => void }) {
+  return (
+    <Dialog open onClose={onKeep} title="Discard what you typed?" describe="It has not been saved.">
+      <div className="flex flex-wrap gap-3">
+        <Button look="main" onClick={onDiscard}>
+          Discard
+        </Button>
+        <Button data-autofocus onClick={onKeep}>
+          Keep typing
+        </Button>
+      </div>
+    </Dialog>
   );
 }
 
@@ -81,7 +121,7 @@ export function FormDialog({
   ...dialog
 }: FormDialogProps) {
   return (
-    <Dialog {...dialog}>
+    <Dialog losesTyping {...dialog}>
       <form noValidate onSubmit={onSubmit}>
         {problem && (
           <Notice tone="wont" className="mb-5">

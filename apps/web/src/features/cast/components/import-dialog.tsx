@@ -66,6 +66,7 @@ export function ImportDialog({ place, open, onClose }: ImportDialogProps) {
 
   return (
     <Dialog
+      losesTyping
       wide
       open={open}
       onClose={close}

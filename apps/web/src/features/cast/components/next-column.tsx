@@ -35,6 +35,7 @@ export function nextColumn(items: readonly PersonNext[] | undefined): DataColumn
     id: 'next',
     header: 'Measure next',
     value: (person) => nextOf(person)?.uncertain,
+    quietOnPhone: (person) => (nextOf(person)?.order.length ?? 0) === 0,
     cell: (person) => {
       const next = nextOf(person);
       return next ? <Next person={person} next={next} /> : null;

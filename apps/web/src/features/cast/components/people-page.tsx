@@ -1,127 +1,28 @@
 import { useMemo, useState } from 'react';
 import { useSearchParams } from 'react-router-dom';
-import { toast } from 'sonner';
 import { Button } from '@/components/button.tsx';
 import { type DataColumn, DataTable } from '@/components/data-table.tsx';
 import { DashedList, EmptyState } from '@/components/empty-state.tsx';
-import { AddIcon, MoreIcon } from '@/components/icons.tsx';
-import { Length } from '@/components/length.tsx';
+import { AddIcon } from '@/components/icons.tsx';
 import { PaleBars } from '@/components/loading.tsx';
-import { Menu } from '@/components/menu.tsx';
 import { Notice } from '@/components/notice.tsx';
 import { PageHeading } from '@/components/page-heading.tsx';
 import type { CastMember } from '@/lib/contract.ts';
-import { download } from '@/lib/download.ts';
-import { type Format, useFormat } from '@/lib/format.ts';
+import { useFormat } from '@/lib/format.ts';
 import { usePageTitle } from '@/lib/page-title.ts';
 import { sayProblem } from '@/lib/problem.ts';
 import { useProduction } from '@/lib/production.ts';
 import { useWorkshop } from '@/lib/workshop.ts';
-import { type CastPlace, csvPath, exportPath, measuringSheetPath, useCast, useMeasureNext } from '../api.ts';
-import { measureColumns, nameColumn, namesOnly } from './people-columns.tsx';
-import { NextLeftOut } from './next-left-out.tsx';
-import { RowMenu } from './row-menu.tsx';
-import { knownBy } from '../known-by.ts';
+import { csvPath, measuringSheetPath, useCast, useMeasureNext } from '../api.ts';
+import { fetchFile } from '../fetch-file.ts';
 import { EraseDialog } from './erase-dialog.tsx';
 import { ImportDialog } from './import-dialog.tsx';
 import { nextColumn } from './next-column.tsx';
+import { measureColumns, nameColumn, namesOnly } from './people-columns.tsx';
+import { NextLeftOut } from './next-left-out.tsx';
+import { RowMenu } from './row-menu.tsx';
 import { MannequinNote } from './mannequin-note.tsx';
 import { PersonDialog } from './person-dialog.tsx';
-import { PersonName } from './person-name.tsx';
-
-const fetchFile = (path: string, query?: Record<string, string>) => {
-  download(path, query).catch((error: unknown) => toast(sayProblem(error)));
-};
-
-const nameColumn: DataColumn<CastMember> = {
-  id: 'name',
-  header: 'Name',
-  value: (person) => `${person.name} ${person.role}`,
-  cell: (person) => <PersonName person={person} />,
-};
-
-function measureColumns(format: Format): DataColumn<CastMember>[] {
-  return [
-    {
-      id: 'height',
-      header: 'Height',
-      align: 'right',
-      value: (person) => person.statureMm,
-      cell: (person) =>
-        person.statureMm === undefined ? (
-          <span className="text-ink-3">not known</span>
-        ) : (
-          <span className={person.statureSource === 'measured' ? 'font-semibold' : undefined}>
-            <Length mm={person.statureMm} feet />
-            {person.statureSource === 'told' && <span className="text-sm text-ink-2">, told</span>}
-          </span>
-        ),
-    },
-    {
-      id: 'weight',
-      header: 'Weight',
-      align: 'right',
-      value: (person) => person.weightKg,
-      cell: (person) =>
-        person.weightKg === undefined ? (
-          <span className="text-ink-3">not known</span>
-        ) : (
-          format.mass(person.weightKg)
-        ),
-    },
-    {
-      id: 'shoe',
-      header: 'Shoe',
-      align: 'right',
-      quietOnPhone: true,
-      value: (person) => person.shoeMm,
-      cell: (person) => (person.shoeMm === undefined ? '' : <Length mm={person.shoeMm} />),
-    },
-    {
-      id: 'known',
-      header: 'Known by',
-      value: (person) => knownBy(person).words,
-      cell: (person) => <span className="text-sm text-ink-2">{knownBy(person).words}</span>,
-    },
-  ];
-}
-
-interface RowMenuProps {
-  place: CastPlace;
-  person: CastMember;
-  onEdit: () => void;
-  onErase: () => void;
-}
-
-function RowMenu({ place, person, onEdit, onErase }: RowMenuProps) {
-  if (person.removed) return null;
-  return (
-    <span className="flex items-center justify-end gap-4">
-      <Button look="word" onClick={onEdit}>
-        Edit <span className="sr-only">{person.name}</span>
-      </Button>
-      <Menu
-        name={`More for ${person.name}`}
-        button={<MoreIcon />}
-        buttonClassName="quick flex size-9 items-center justify-center rounded-sm hover:bg-sunk data-open:bg-chalk-wash"
-        side="end"
-        entries={[
-          {
-            id: 'sheet',
-            words: 'Measuring sheet (PDF)',
-            onPress: () => fetchFile(measuringSheetPath(place), { person: person.id }),
-          },
-          {
-            id: 'export',
-            words: 'Export what is held',
-            onPress: () => fetchFile(exportPath(place, person.id)),
-          },
-          { id: 'erase', words: 'Erase', onPress: onErase },
-        ]}
-      />
-    </span>
-  );
-}
 
 export function PeoplePage() {
   const workshop = useWorkshop();
@@ -130,7 +31,6 @@ export function PeoplePage() {
   const format = useFormat();
   const place = useMemo(
     () => ({ workshopId: workshop.id, productionId: production.id }),
-        {people.length > 0 && workshop.canEdit && <NextLeftOut place={place} />}
     [workshop.id, production.id],
   );
   const cast = useCast(place);
@@ -147,16 +47,7 @@ export function PeoplePage() {
   const add = () => setSearch({ add: '1' });
 
   const columns = useMemo<DataColumn<CastMember>[]>(() => {
-    if (!workshop.canEdit) {
-      return [
-        {
-          ...nameColumn,
-          value: (person) => person.name,
-          cell: (person) => <PersonName person={{ ...person, role: '' }} />,
-        },
-        { id: 'part', header: 'Part', value: (person) => person.role, cell: (person) => person.role },
-      ];
-    }
+    if (!workshop.canEdit) return namesOnly;
     return [
       nameColumn,
       ...measureColumns(format),
@@ -239,6 +130,7 @@ export function PeoplePage() {
             }
           />
         )}
+        {people.length > 0 && workshop.canEdit && <NextLeftOut place={place} />}
       </div>
       <div className="mt-8 grid gap-x-14 gap-y-6 desk:grid-cols-2">
         <MannequinNote />

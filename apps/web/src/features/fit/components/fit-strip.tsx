@@ -3,6 +3,7 @@ import { SitterDot } from '@/components/sitter-dot.tsx';
 import { Verdict, VerdictCounts } from '@/components/verdict.tsx';
 import { checkName } from '../amounts.ts';
 import { useFitView } from '../fit-view.ts';
+import { SittersRow } from './sitters-row.tsx';
 import { CountedApart } from './counted-apart.tsx';
 import { shortName } from '@/lib/short-name.ts';
 
@@ -36,12 +37,12 @@ export function FitStrip({ onOpen }: { onOpen: () => void }) {
   }
   return (
     <>
-      <ul className="relative flex min-w-0 flex-1 gap-x-5 overflow-x-auto mask-r-from-[calc(100%-2rem)] mask-r-to-100% pr-8 max-tablet:hidden">
+      <SittersRow>
         {sheet.rows.map((row) => (
           <li key={`${row.sitterId}|${row.placeId}`} className="shrink-0">
             <button
               type="button"
-              className="quick grid min-h-12 content-center px-1 text-left whitespace-nowrap hover:bg-sunk"
+              className="quick grid min-h-12 content-center px-1.5 text-left whitespace-nowrap hover:bg-sunk focus-visible:-outline-offset-2"
               onClick={() => {
                 const cause = row.cells.find(
                   ({ outcome }) => outcome.kind === 'verdict' && outcome.verdict === row.worst,
@@ -57,7 +58,7 @@ export function FitStrip({ onOpen }: { onOpen: () => void }) {
             </button>
           </li>
         ))}
-      </ul>
+      </SittersRow>
       <div className="min-w-0 text-sm max-tablet:py-1.5">
         <VerdictCounts counts={sheet.counts} className="tablet:hidden" />
         <CountedApart className="text-xs text-ink-2 tablet:max-w-56 tablet:max-desk:hidden" />
