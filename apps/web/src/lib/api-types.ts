@@ -933,6 +933,54 @@ export interface paths {
         patch?: never;
         trace?: never;
     };
+    "/api/workshops/{workshopId}/productions/{productionId}/sets/{setId}/suggestions": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        get: operations["Suggestions_list"];
+        put?: never;
+        post: operations["Suggestions_start"];
+        delete?: never;
+        options?: never;
+        head?: never;
+        patch?: never;
+        trace?: never;
+    };
+    "/api/workshops/{workshopId}/productions/{productionId}/sets/{setId}/suggestions/{suggestionId}": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        get: operations["Suggestions_get"];
+        put?: never;
+        post?: never;
+        delete: operations["Suggestions_remove"];
+        options?: never;
+        head?: never;
+        patch?: never;
+        trace?: never;
+    };
+    "/api/workshops/{workshopId}/productions/{productionId}/sets/{setId}/suggestions/{suggestionId}/cancel": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        get?: never;
+        put?: never;
+        post: operations["Suggestions_cancel"];
+        delete?: never;
+        options?: never;
+        head?: never;
+        patch?: never;
+        trace?: never;
+    };
     "/api/workshops/{workshopId}/upholsterers": {
         parameters: {
             query?: never;
@@ -2397,6 +2445,10 @@ export interface components {
             items: components["schemas"]["ListedStudyDto"][];
         };
         StartStudyDto: {
+            /** @description the draft that was seen; either this or `revisionLetter` */
+            draftNumber?: number;
+            /** @description an issued revision */
+            revisionLetter?: string;
             /** @description one that comes with the product, as `us-civilians-2015`, or one of the workshop’s own */
             populationId: string;
             /** @description women of 100 people; 50 when absent, or all or none in a population of one sex */
@@ -2411,10 +2463,6 @@ export interface components {
             ruleIds?: string[];
             /** @description `pieceId:place` of places that count; all when absent */
             placeIds?: string[];
-            /** @description the draft that was seen; either this or `revisionLetter` */
-            draftNumber?: number;
-            /** @description an issued revision */
-            revisionLetter?: string;
         };
         StudyDto: {
             /** Format: uuid */
@@ -2466,6 +2514,209 @@ export interface components {
         PopulationUsesDto: {
             /** @description by production and set */
             items: components["schemas"]["PopulationUseDto"][];
+        };
+        SearchProgressDto: {
+            /** @description choices tried */
+            done: number;
+            /** @description of at most so many; 0 until a worker begins */
+            of: number;
+        };
+        FreeDimensionDto: {
+            dimensionId: string;
+            label: string;
+            /**
+             * @description of every number of this dimension
+             * @enum {string}
+             */
+            unit: "mm" | "deg" | "N";
+            /** @description pieces that move */
+            marks: string[];
+            /** @description tables that go up and down with the seats */
+            tableMarks: string[];
+            /** @description in the document that was asked about */
+            value: number;
+            min: number;
+            max: number;
+            /** @description rounding step */
+            step: number;
+        };
+        ServedDto: {
+            /** @description of a cast member, or `mannequin:pieceId:place` */
+            sitterId: string;
+            name: string;
+        };
+        ListedSuggestionDto: {
+            /** Format: uuid */
+            id: string;
+            /** @enum {string} */
+            state: "queued" | "running" | "done" | "cancelled" | "failed";
+            progress: components["schemas"]["SearchProgressDto"];
+            /** @description of the document; either this or `revisionLetter` */
+            draftNumber?: number;
+            revisionLetter?: string;
+            free: components["schemas"]["FreeDimensionDto"][];
+            /** @description who must be served */
+            served: components["schemas"]["ServedDto"][];
+            /** @description of whom as many as can be are served then */
+            population?: components["schemas"]["ToldPopulationDto"];
+            /** @description women of 100 people; absent for a population of one sex */
+            womenPercent?: number;
+            ruleVersion: string;
+            startedBy: components["schemas"]["PersonDto"];
+            /** Format: date-time */
+            startedAt: string;
+            /** Format: date-time */
+            endedAt?: string;
+            /** @description why it failed */
+            fault?: string;
+        };
+        SuggestionListDto: {
+            /** @description the last 20, newest first */
+            items: components["schemas"]["ListedSuggestionDto"][];
+        };
+        StartFreeDto: {
+            /** @description of a dimension of the set, as `seat-height`, `seat-depth|b1`, `table-height` */
+            dimensionId: string;
+            /** @description in the dimension’s unit: millimetres, degrees or newtons */
+            min?: number;
+            /** @description in the dimension’s unit */
+            max?: number;
+            /** @description in the dimension’s unit; instead of `min` and `max` */
+            tolerance?: number;
+            /** @description rounding step in the dimension’s unit; as the production rounds when absent */
+            step?: number;
+        };
+        StartSuggestionDto: {
+            /** @description the draft that was seen; either this or `revisionLetter` */
+            draftNumber?: number;
+            /** @description an issued revision */
+            revisionLetter?: string;
+            free: components["schemas"]["StartFreeDto"][];
+            /** @description who must be served: ids of cast members who sit in the set, and `mannequin:pieceId:place`; everybody who sits when absent */
+            sitterIds?: string[];
+            /** @description then as many as can be of these people; nobody else is asked about when absent */
+            populationId?: string;
+            /** @description women of 100 people; 50 when absent, or all or none in a population of one sex */
+            womenPercent?: number;
+        };
+        ChosenValueDto: {
+            dimensionId: string;
+            /** @description in the dimension’s unit */
+            value: number;
+        };
+        MissDto: {
+            sitterId: string;
+            /** @description absent where the place is gone altogether */
+            ruleId?: string;
+            /** @description missing to the fail line, in the rule’s unit; for owner and designer, until the person is erased */
+            byMm?: number;
+            /** @description answered in the set as it is, and no longer */
+            gone?: boolean;
+        };
+        ChoiceDto: {
+            values: components["schemas"]["ChosenValueDto"][];
+            /** @description none: everybody named is at least tight in every check */
+            misses: components["schemas"]["MissDto"][];
+            /** @description checks that are tight */
+            tight: number;
+            /** @description checks about pieces and ways, and clauses, that turn worse */
+            worse: number;
+            /** @description of the population at least tight in all of `counted` at once, 0 to 1 */
+            share?: number;
+            /** @description sum of the moves, each against its range */
+            distance: number;
+        };
+        CheckChangeDto: {
+            ruleId: string;
+            /** @enum {string} */
+            from: "fits" | "tight" | "wontFit" | "notKnown" | "inside" | "outside" | "gone";
+            /** @enum {string} */
+            to: "fits" | "tight" | "wontFit" | "notKnown" | "inside" | "outside" | "gone";
+        };
+        SitterChangeDto: {
+            sitterId: string;
+            gains: components["schemas"]["CheckChangeDto"][];
+            losses: components["schemas"]["CheckChangeDto"][];
+        };
+        PieceChangeDto: {
+            ruleId: string;
+            /** @enum {string} */
+            from: "fits" | "tight" | "wontFit" | "notKnown" | "inside" | "outside" | "gone";
+            /** @enum {string} */
+            to: "fits" | "tight" | "wontFit" | "notKnown" | "inside" | "outside" | "gone";
+            marks: string[];
+        };
+        PieceChangesDto: {
+            gains: components["schemas"]["PieceChangeDto"][];
+            losses: components["schemas"]["PieceChangeDto"][];
+        };
+        AnswerDto: {
+            values: components["schemas"]["ChosenValueDto"][];
+            /** @description none: everybody named is at least tight in every check */
+            misses: components["schemas"]["MissDto"][];
+            /** @description checks that are tight */
+            tight: number;
+            /** @description checks about pieces and ways, and clauses, that turn worse */
+            worse: number;
+            /** @description of the population at least tight in all of `counted` at once, 0 to 1 */
+            share?: number;
+            /** @description sum of the moves, each against its range */
+            distance: number;
+            /**
+             * @description the best; the one that moves least and misses no more; another good one far from both
+             * @enum {string}
+             */
+            kind: "best" | "nearest" | "another";
+            /** @description whom it costs and whom it helps */
+            sitters: components["schemas"]["SitterChangeDto"][];
+            pieces: components["schemas"]["PieceChangesDto"];
+        };
+        BlameDto: {
+            /** @enum {string} */
+            kind: "sitter" | "rule";
+            /** @description of the sitter, or of the rule */
+            id: string;
+            /** @description misses that are left in the best answer without it */
+            left: number;
+        };
+        SuggestionDto: {
+            /** Format: uuid */
+            id: string;
+            /** @enum {string} */
+            state: "queued" | "running" | "done" | "cancelled" | "failed";
+            progress: components["schemas"]["SearchProgressDto"];
+            /** @description of the document; either this or `revisionLetter` */
+            draftNumber?: number;
+            revisionLetter?: string;
+            free: components["schemas"]["FreeDimensionDto"][];
+            /** @description who must be served */
+            served: components["schemas"]["ServedDto"][];
+            /** @description of whom as many as can be are served then */
+            population?: components["schemas"]["ToldPopulationDto"];
+            /** @description women of 100 people; absent for a population of one sex */
+            womenPercent?: number;
+            ruleVersion: string;
+            startedBy: components["schemas"]["PersonDto"];
+            /** Format: date-time */
+            startedAt: string;
+            /** Format: date-time */
+            endedAt?: string;
+            /** @description why it failed */
+            fault?: string;
+            /** @description the set as it is; absent where the ranges leave it out */
+            present?: components["schemas"]["ChoiceDto"];
+            /** @description found so far; up to three that differ */
+            answers: components["schemas"]["AnswerDto"][];
+            /** @description when done: whether an answer serves everybody named */
+            servesAll?: boolean;
+            /** @description when done and no answer serves all: the one sitter or rule that stands most in the way */
+            blame?: components["schemas"]["BlameDto"];
+            /** @description rules that the share counts at once */
+            counted: string[];
+            /** @description rules that the population cannot be told by: with one there is no share */
+            unknown: string[];
+            /** @description rules that nobody was found to meet: no share counts them */
+            metByNobody: string[];
         };
         UpholstererDto: {
             /** Format: uuid */
@@ -5668,6 +5919,182 @@ export interface operations {
                 content: {
                     "application/json": components["schemas"]["PopulationUsesDto"];
                 };
+            };
+            /** @description what went wrong (RFC 9457) */
+            default: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemBody"];
+                };
+            };
+        };
+    };
+    Suggestions_list: {
+        parameters: {
+            query?: never;
+            header?: never;
+            path: {
+                productionId: string;
+                setId: string;
+            };
+            cookie?: never;
+        };
+        requestBody?: never;
+        responses: {
+            200: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["SuggestionListDto"];
+                };
+            };
+            /** @description what went wrong (RFC 9457) */
+            default: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemBody"];
+                };
+            };
+        };
+    };
+    Suggestions_start: {
+        parameters: {
+            query?: never;
+            header?: never;
+            path: {
+                productionId: string;
+                setId: string;
+            };
+            cookie?: never;
+        };
+        requestBody: {
+            content: {
+                "application/json": components["schemas"]["StartSuggestionDto"];
+            };
+        };
+        responses: {
+            202: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["SuggestionDto"];
+                };
+            };
+            /** @description the draft moved on, or too many searches are not done yet */
+            409: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content?: never;
+            };
+            /** @description what went wrong (RFC 9457) */
+            default: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemBody"];
+                };
+            };
+        };
+    };
+    Suggestions_get: {
+        parameters: {
+            query?: never;
+            header?: never;
+            path: {
+                productionId: string;
+                setId: string;
+                suggestionId: string;
+            };
+            cookie?: never;
+        };
+        requestBody?: never;
+        responses: {
+            /** @description with the answers found so far */
+            200: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["SuggestionDto"];
+                };
+            };
+            /** @description what went wrong (RFC 9457) */
+            default: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemBody"];
+                };
+            };
+        };
+    };
+    Suggestions_remove: {
+        parameters: {
+            query?: never;
+            header?: never;
+            path: {
+                productionId: string;
+                setId: string;
+                suggestionId: string;
+            };
+            cookie?: never;
+        };
+        requestBody?: never;
+        responses: {
+            204: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content?: never;
+            };
+            /** @description what went wrong (RFC 9457) */
+            default: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemBody"];
+                };
+            };
+        };
+    };
+    Suggestions_cancel: {
+        parameters: {
+            query?: never;
+            header?: never;
+            path: {
+                productionId: string;
+                setId: string;
+                suggestionId: string;
+            };
+            cookie?: never;
+        };
+        requestBody?: never;
+        responses: {
+            /** @description the answers found by then stay */
+            200: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["SuggestionDto"];
+                };
+            };
+            /** @description it has ended already */
+            409: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content?: never;
             };
             /** @description what went wrong (RFC 9457) */
             default: {
