@@ -1,29 +1,15 @@
-import { loadRuleBook } from '@settlewright/anthropometry';
-import rules from '@settlewright/seed-data/fit-rules.json' with { type: 'json' };
 import type { SetSituation } from '@settlewright/anthropometry';
 import fc from 'fast-check';
 import { describe, expect, it } from 'vitest';
 import { setParameter } from '../pieces/parameters.ts';
-import type { Piece, PieceKind, PieceOf, SetDocument } from '../room/document.ts';
+import type { Piece, PieceKind, SetDocument } from '../room/document.ts';
 import { ARRANGEMENTS } from '../room/arrangements.ts';
-import { addPiece, newPiece } from '../room/edit-pieces.ts';
+import { addPiece } from '../room/edit-pieces.ts';
 import { emptySetDocument } from '../room/read-document.ts';
 import { benchLayout } from '../pieces/bench-layout.ts';
-import { measureSet as measured } from './measure-set.ts';
-
-const ruleBook = loadRuleBook(rules);
-const measureSet = (document: SetDocument) => measured(document, ruleBook);
+import { measureSet, piece } from '../../test/measured.ts';
 
 const INCH = 25.4;
-
-function piece<K extends PieceKind>(
-  kind: K,
-  mark: string,
-  [xMm, zMm, turnDeg]: [number, number, number],
-  sizes: Partial<PieceOf<K>> = {},
-): PieceOf<K> {
-  return { ...newPiece(kind, mark.toLowerCase(), mark, { xMm, zMm, turnDeg }), ...sizes };
-}
 
 const setOf = (...pieces: Piece[]): SetDocument => ({ ...emptySetDocument(), pieces });
 

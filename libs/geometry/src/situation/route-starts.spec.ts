@@ -1,16 +1,11 @@
-import { loadRuleBook } from '@settlewright/anthropometry';
-import rules from '@settlewright/seed-data/fit-rules.json' with { type: 'json' };
 import { describe, expect, it } from 'vitest';
 import { askedShapes } from '../drawing/asked.ts';
-import type { Piece, PieceKind, SetDocument } from '../room/document.ts';
+import type { Piece, PieceKind } from '../room/document.ts';
 import { newPiece } from '../room/edit-pieces.ts';
 import { footprint } from '../room/footprint.ts';
 import { emptySetDocument } from '../room/read-document.ts';
-import { measureSet as measured } from './measure-set.ts';
+import { measureSet } from '../../test/measured.ts';
 import { cornerIndex, routeBetween, routeThrough } from './route-starts.ts';
-
-const ruleBook = loadRuleBook(rules);
-const measureSet = (document: SetDocument) => measured(document, ruleBook);
 
 const piece = (kind: PieceKind, mark: string, xMm: number, zMm: number, sizes: object = {}): Piece => ({
   ...newPiece(kind, mark.toLowerCase(), mark, { xMm, zMm, turnDeg: 0 }),

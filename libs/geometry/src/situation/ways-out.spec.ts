@@ -1,26 +1,13 @@
-import { loadRuleBook } from '@settlewright/anthropometry';
-import rules from '@settlewright/seed-data/fit-rules.json' with { type: 'json' };
 import { describe, expect, it } from 'vitest';
 import { benchLayout } from '../pieces/bench-layout.ts';
-import type { Piece, PieceKind, PieceOf, SetDocument } from '../room/document.ts';
+import type { Piece, SetDocument } from '../room/document.ts';
 import { newPiece } from '../room/edit-pieces.ts';
 import { emptySetDocument, readSetDocument } from '../room/read-document.ts';
 import { setParameter } from '../pieces/parameters.ts';
-import { measureSet as measured } from './measure-set.ts';
-
-const ruleBook = loadRuleBook(rules);
-const measureSet = (document: SetDocument) => measured(document, ruleBook);
+import { measureSet, piece } from '../../test/measured.ts';
 
 const IN = 25.4;
 
-function piece<K extends PieceKind>(
-  kind: K,
-  mark: string,
-  [xMm, zMm, turnDeg]: [number, number, number],
-  sizes: Partial<PieceOf<K>> = {},
-): PieceOf<K> {
-  return { ...newPiece(kind, mark.toLowerCase(), mark, { xMm, zMm, turnDeg }), ...sizes };
-}
 const setOf = (pieces: Piece[], asked: Partial<SetDocument['asked']> = {}): SetDocument => {
   const empty = emptySetDocument();
   return { ...empty, pieces, asked: { ...empty.asked, ...asked } };
