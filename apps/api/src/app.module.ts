@@ -7,6 +7,7 @@ import { AuthModule } from './auth/auth.module';
 import { CastModule } from './cast/cast.module';
 import { CastErasureModule } from './cast/erasure/cast-erasure.module';
 import { MeasuringModule } from './cast/measuring/measuring.module';
+import { ChoicesModule } from './choices/choices.module';
 import { logParameters } from './common/request-log';
 import { settings } from './config/settings';
 import { CushionOrdersModule } from './cushion-orders/cushion-orders.module';
@@ -49,6 +50,7 @@ import { WorkshopsModule } from './workshops/workshops.module';
     PopulationsModule,
     StudiesModule,
     SuggestionsModule,
+    ChoicesModule,
     UpholsterersModule,
     CushionOrdersModule,
     DemoModule,

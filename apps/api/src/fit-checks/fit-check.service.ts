@@ -5,11 +5,14 @@ import {
   checkSitter,
   createBodyModel,
   type FitSheet,
+  type KnownPerson,
   loadRuleBook,
   type NextMeasures,
   nextMeasures,
   type RuleBook,
   type Sitter,
+  standIn,
+  type StandInCheck,
 } from '@settlewright/anthropometry';
 import { measureSet, type SetDocument, type SitterRef } from '@settlewright/geometry';
 import { Injectable } from '@nestjs/common';
@@ -45,14 +48,38 @@ export class FitCheckService {
   private readonly recent = new RecentAnswers<NextMeasures>(RECENT);
 
   /** `confidence` is what the workshop asks of a verdict; null: as much as the rule book does. */
-  sheetFor(document: SetDocument, cast: readonly CastPerson[], confidence: number | null): FitSheet {
+  sheetFor(
+    document: SetDocument,
+    cast: readonly CastPerson[],
+    confidence: number | null,
+    { sittersOnly = false } = {},
+  ): FitSheet {
     return checkSet({
       situation: measureSet(document, this.ruleBook),
       sitters: this.sitters(document, cast),
       ruleBook: this.ruleBook,
       model: this.model,
       settings: { ...document.asked, ...(confidence === null ? {} : { confidence }) },
+      sittersOnly,
     });
+  }
+
+  /** How far the sit of one person at a place can be trusted for another, check by check. */
+  standIn(
+    { document, placeId, confidence }: { document: SetDocument; placeId: string; confidence: number | null },
+    people: Record<'castMember' | 'standIn', KnownPerson>,
+  ): StandInCheck[] | undefined {
+    const place = measureSet(document).places.find((one) => one.placeId === placeId);
+    return (
+      place &&
+      standIn({
+        ...people,
+        place,
+        ruleBook: this.ruleBook,
+        model: this.model,
+        settings: { ...document.asked, ...(confidence === null ? {} : { confidence }) },
+      })
+    );
   }
 
   /**

@@ -34,15 +34,15 @@ export interface ConfidenceSince {
 
 /** What a sheet says of the probability that its verdicts ask for. */
 export function confidenceSentence(
-  sheet: ShownSheet,
+  { confidence }: Pick<ShownSheet, 'confidence'>,
   ruleBook: RuleBook,
   since: ConfidenceSince | null,
   timeZone: string,
 ): string {
-  if (since === null) return confidenceWords(sheet.confidence, ruleBook);
+  if (since === null) return confidenceWords(confidence, ruleBook);
   const day = new Intl.DateTimeFormat('en-GB', { dateStyle: 'long', timeZone }).format(since.at);
   const happened = since.kind === 'issued' ? 'as in force when issued' : 'set by the workshop';
-  return confidenceWords(sheet.confidence, ruleBook, `${happened} on ${day}`);
+  return confidenceWords(confidence, ruleBook, `${happened} on ${day}`);
 }
 
 /** The rule of a cell; a revision of long ago may name one that the rule book no longer has. */

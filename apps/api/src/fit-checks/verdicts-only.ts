@@ -2,9 +2,9 @@ import type { FitCell, FitSheet, Outcome, RuleBook } from '@settlewright/anthrop
 import { READS_NO_BODY } from './without-person';
 
 /** Fine margins of several checks would give back the measure that they read. */
-const STEP_MM = 25.4;
+export const COARSE_STEP_MM = 25.4;
 /** Room beyond this is only said to be at least so much: more helps nobody who builds, and tells of the body. */
-const MOST_ROOM_MM = 3 * STEP_MM;
+export const MOST_ROOM_MM = 3 * COARSE_STEP_MM;
 
 /** What everybody may know of a verdict: the word, roughly how much room is left, and whether it was predicted. */
 interface VerdictOnly {
@@ -98,8 +98,8 @@ function openOutcome(outcome: Outcome, isCoarse: boolean): OpenOutcome {
 /** Down to a whole step, so that room is never overstated and what is missing stays missing. Erased numbers stay empty. */
 function coarse(mm: number): number {
   if (typeof mm !== 'number') return mm;
-  const steps = Math.floor(mm / STEP_MM + ON_A_STEP);
-  return Math.min(MOST_ROOM_MM, steps * STEP_MM);
+  const steps = Math.floor(mm / COARSE_STEP_MM + ON_A_STEP);
+  return Math.min(MOST_ROOM_MM, steps * COARSE_STEP_MM);
 }
 
 /** What lies on a step stays there, whatever a sum lost in its last digit. */

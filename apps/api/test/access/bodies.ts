@@ -33,6 +33,7 @@ export function bodiesFor(shop: Shop): Record<string, object> {
     [`POST ${S}/notes`]: { text: 'Looks right', kind: 'comment' },
     [`PATCH ${S}/notes/{noteId}`]: { resolved: true },
     [`PUT ${S}/built`]: { partId: shop.partId, built: true },
+    ...choiceBodies(S, shop),
     [`POST ${S}/studies`]: { populationId: 'british', people: 100, revisionLetter: letter },
     [`POST ${S}/suggestions`]: {
       free: [{ dimensionId: 'seat-depth', tolerance: 25 }],
@@ -48,4 +49,24 @@ export function bodiesFor(shop: Shop): Record<string, object> {
     [`POST ${O}/state`]: { to: 'agreed' },
     [`POST ${O}/messages`]: { text: 'When?' },
   };
+}
+
+/** Questions about choices, the same of the draft and of a revision. */
+function choiceBodies(S: string, { document, parameters: { letter } }: Shop): Record<string, object> {
+  const [seat] = document.seating;
+  const person = { bodyData: 'women', statureMm: 1600 };
+  const placeId = `${seat?.pieceId}:${seat?.place}`;
+  const asked = {
+    'story-stick': { dimension: 'seat-depth' },
+    'story-stick.pdf': { dimension: 'seat-depth' },
+    'dimension-map': { across: 'seat-depth', up: 'sill-depth' },
+    'stand-in': { placeId, person },
+  };
+  return Object.fromEntries([
+    [`POST ${S}/comparison`, { from: { revisionLetter: letter }, to: {} }],
+    ...Object.entries(asked).flatMap(([what, body]) => [
+      [`POST ${S}/draft/${what}`, body],
+      [`POST ${S}/revisions/{letter}/${what}`, body],
+    ]),
+  ]) as Record<string, object>;
 }

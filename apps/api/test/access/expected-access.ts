@@ -88,6 +88,16 @@ export const EXPECTED_ACCESS: Record<string, AccessRule> = {
   [`GET ${S}/built`]: EVERY_MEMBER,
   [`PUT ${S}/built`]: ['owner', 'designer', 'carpenter'],
 
+  [`POST ${S}/draft/story-stick`]: EVERY_MEMBER,
+  [`POST ${S}/draft/story-stick.pdf`]: EVERY_MEMBER,
+  [`POST ${S}/draft/dimension-map`]: EVERY_MEMBER,
+  [`POST ${S}/draft/stand-in`]: MAKERS,
+  [`POST ${S}/revisions/{letter}/story-stick`]: EVERY_MEMBER,
+  [`POST ${S}/revisions/{letter}/story-stick.pdf`]: EVERY_MEMBER,
+  [`POST ${S}/revisions/{letter}/dimension-map`]: EVERY_MEMBER,
+  [`POST ${S}/revisions/{letter}/stand-in`]: MAKERS,
+  [`POST ${S}/comparison`]: EVERY_MEMBER,
+
   [`GET ${S}/studies`]: EVERY_MEMBER,
   [`POST ${S}/studies`]: MAKERS,
   [`GET ${S}/studies/{studyId}`]: EVERY_MEMBER,

@@ -981,6 +981,150 @@ export interface paths {
         patch?: never;
         trace?: never;
     };
+    "/api/workshops/{workshopId}/productions/{productionId}/sets/{setId}/draft/story-stick": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        get?: never;
+        put?: never;
+        post: operations["StorySticks_ofDraft"];
+        delete?: never;
+        options?: never;
+        head?: never;
+        patch?: never;
+        trace?: never;
+    };
+    "/api/workshops/{workshopId}/productions/{productionId}/sets/{setId}/revisions/{letter}/story-stick": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        get?: never;
+        put?: never;
+        post: operations["StorySticks_ofRevision"];
+        delete?: never;
+        options?: never;
+        head?: never;
+        patch?: never;
+        trace?: never;
+    };
+    "/api/workshops/{workshopId}/productions/{productionId}/sets/{setId}/draft/story-stick.pdf": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        get?: never;
+        put?: never;
+        post: operations["StorySticks_draftPdf"];
+        delete?: never;
+        options?: never;
+        head?: never;
+        patch?: never;
+        trace?: never;
+    };
+    "/api/workshops/{workshopId}/productions/{productionId}/sets/{setId}/revisions/{letter}/story-stick.pdf": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        get?: never;
+        put?: never;
+        post: operations["StorySticks_revisionPdf"];
+        delete?: never;
+        options?: never;
+        head?: never;
+        patch?: never;
+        trace?: never;
+    };
+    "/api/workshops/{workshopId}/productions/{productionId}/sets/{setId}/draft/dimension-map": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        get?: never;
+        put?: never;
+        post: operations["DimensionMaps_ofDraft"];
+        delete?: never;
+        options?: never;
+        head?: never;
+        patch?: never;
+        trace?: never;
+    };
+    "/api/workshops/{workshopId}/productions/{productionId}/sets/{setId}/revisions/{letter}/dimension-map": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        get?: never;
+        put?: never;
+        post: operations["DimensionMaps_ofRevision"];
+        delete?: never;
+        options?: never;
+        head?: never;
+        patch?: never;
+        trace?: never;
+    };
+    "/api/workshops/{workshopId}/productions/{productionId}/sets/{setId}/comparison": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        get?: never;
+        put?: never;
+        post: operations["Comparisons_compare"];
+        delete?: never;
+        options?: never;
+        head?: never;
+        patch?: never;
+        trace?: never;
+    };
+    "/api/workshops/{workshopId}/productions/{productionId}/sets/{setId}/draft/stand-in": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        get?: never;
+        put?: never;
+        post: operations["StandIns_ofDraft"];
+        delete?: never;
+        options?: never;
+        head?: never;
+        patch?: never;
+        trace?: never;
+    };
+    "/api/workshops/{workshopId}/productions/{productionId}/sets/{setId}/revisions/{letter}/stand-in": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        get?: never;
+        put?: never;
+        post: operations["StandIns_ofRevision"];
+        delete?: never;
+        options?: never;
+        head?: never;
+        patch?: never;
+        trace?: never;
+    };
     "/api/workshops/{workshopId}/upholsterers": {
         parameters: {
             query?: never;
@@ -2717,6 +2861,503 @@ export interface components {
             unknown: string[];
             /** @description rules that nobody was found to meet: no share counts them */
             metByNobody: string[];
+        };
+        AskStickDto: {
+            /** @description whose shares are counted: one that comes with the product, as `us-civilians-2015`, or one of the workshop’s own; no shares when absent */
+            populationId?: string;
+            /** @description women of 100 people; 50 when absent */
+            womenPercent?: number;
+            /**
+             * @description decides the step of values, and the words of a paper; the production’s when absent
+             * @enum {string}
+             */
+            units?: "feet-inches" | "decimal-inches" | "millimetres";
+            /**
+             * @description fractions of an inch; the production’s when absent
+             * @enum {number}
+             */
+            roundTo?: 16 | 8;
+            /** @description for a draft: the one that was seen; another one is refused. Any when absent */
+            draftNumber?: number;
+            /** @description id of a number of the set: its kind, as `seat-height` (for all pieces that have one), `seat-and-tables`, or `kind|pieceId` for one piece of several */
+            dimension: string;
+            /** @description the kind’s number of this piece alone */
+            pieceId?: string;
+            /** @description value that is tried, in the unit of the number (mm, degrees or newtons); the present one when absent */
+            value?: number;
+            /** @description rule of a person whose stretches are wanted, or `all` for every one that the number moves; the number’s own when absent */
+            ruleId?: string;
+        };
+        VersionStateDto: {
+            /** @description of a draft */
+            draftNumber?: number;
+            /** @description of an issued revision */
+            revisionLetter?: string;
+        };
+        DimensionDto: {
+            id: string;
+            label: string;
+            /** @enum {string} */
+            unit: "mm" | "deg" | "N";
+            /** @description pieces that move */
+            pieceIds: string[];
+            marks: string[];
+            /** @description tables that go up and down with the seats */
+            tableMarks: string[];
+            /** @description the present value */
+            value: number;
+            min: number;
+            max: number;
+            ruleId: string;
+        };
+        StretchDto: {
+            from: number;
+            to: number;
+        };
+        StickRowDto: {
+            sitterId: string;
+            /** @description `pieceId:place` */
+            placeId: string;
+            name: string;
+            /** @description predicted or told, not measured */
+            estimated: boolean;
+            /** @description where the sitter fits. `full`: by best values, ends where a line is crossed. `verdicts`: from one tried value to another */
+            fits: components["schemas"]["StretchDto"][];
+            /** @description where the sitter is at least tight; holds `fits` */
+            tight: components["schemas"]["StretchDto"][];
+            /** @description only with `full`: where each check keeps its fail line at the low end of its own 90 % range */
+            surelyTight?: components["schemas"]["StretchDto"][];
+            /** @description only with `full`: at the high end */
+            perhapsTight?: components["schemas"]["StretchDto"][];
+            /** @description worst verdict at each tried value */
+            states: ("fits" | "tight" | "wontFit" | "notKnown" | "gone")[];
+        };
+        StickClauseDto: {
+            ruleId: string;
+            clause: string;
+            marks: string[];
+            inside: components["schemas"]["StretchDto"][];
+        };
+        StickBandDto: {
+            name: string;
+            /** @description the sentence with its source */
+            words: string;
+            stretches: components["schemas"]["StretchDto"][];
+        };
+        StickAnswerDto: {
+            /** @description `pieceId:place` */
+            placeId: string;
+            /** @enum {string} */
+            state: "fits" | "tight" | "wontFit" | "notKnown" | "gone";
+        };
+        CrowdDto: {
+            id: string;
+            name: string;
+            source: string;
+            cautions: string[];
+            /** @description absent for a population of one sex */
+            womenPercent?: number;
+            people: number;
+            /** @description places that move; a person counts who fits at all of them */
+            placeIds: string[];
+        };
+        ValueShareDto: {
+            value: number;
+            /** @description 0 to 1; absent where a measure that is read is not known of the people */
+            fits?: number;
+            /** @description 0 to 1 */
+            atLeastTight?: number;
+        };
+        StickSharesDto: {
+            population: components["schemas"]["CrowdDto"];
+            /** @description of the rules whose stretches are shown */
+            points: components["schemas"]["ValueShareDto"][];
+            /** @description of every rule of a person at once */
+            joint: components["schemas"]["ValueShareDto"][];
+        };
+        RuleSourceDto: {
+            cite: string;
+            /** @description how it was read, as `read in the source` or `from memory` */
+            read: string;
+        };
+        ShownRuleDto: {
+            id: string;
+            name: string;
+            why: string;
+            /** @description what its numbers rest on */
+            sourceWord: string;
+            sources: components["schemas"]["RuleSourceDto"][];
+        };
+        StoryStickDto: {
+            /**
+             * @description `verdicts` for who sees no measures: values in the steps and the reach of shown margins, stretches by verdicts
+             * @enum {string}
+             */
+            detail: "full" | "verdicts";
+            version: components["schemas"]["VersionStateDto"];
+            dimension: components["schemas"]["DimensionDto"];
+            /** @description step by which the number is chosen, in its unit */
+            step: number;
+            /** @description rising values that were tried */
+            values: number[];
+            /** @description rule whose stretches are shown, or `all` */
+            shownRule: string;
+            /** @description rules of a person that the number moves */
+            ruleIds: string[];
+            /** @description highest stretch first */
+            rows: components["schemas"]["StickRowDto"][];
+            allFit: components["schemas"]["StretchDto"][];
+            allTight: components["schemas"]["StretchDto"][];
+            /** @description code clauses that answer differently along the number */
+            clauses: components["schemas"]["StickClauseDto"][];
+            /** @description what is usual, and what clauses ask, in words */
+            bands: components["schemas"]["StickBandDto"][];
+            /** @description the value that is tried; the present one when none was asked for */
+            value: number;
+            /** @description worst verdict of each row at that value */
+            atValue: components["schemas"]["StickAnswerDto"][];
+            shares?: components["schemas"]["StickSharesDto"];
+            rules: components["schemas"]["ShownRuleDto"][];
+            /** @description probability from which verdicts are given */
+            confidence: number;
+            ruleVersion: string;
+            caution: string;
+        };
+        AskMapDto: {
+            /** @description whose shares are counted: one that comes with the product, as `us-civilians-2015`, or one of the workshop’s own; no shares when absent */
+            populationId?: string;
+            /** @description women of 100 people; 50 when absent */
+            womenPercent?: number;
+            /**
+             * @description decides the step of values, and the words of a paper; the production’s when absent
+             * @enum {string}
+             */
+            units?: "feet-inches" | "decimal-inches" | "millimetres";
+            /**
+             * @description fractions of an inch; the production’s when absent
+             * @enum {number}
+             */
+            roundTo?: 16 | 8;
+            /** @description for a draft: the one that was seen; another one is refused. Any when absent */
+            draftNumber?: number;
+            /** @description id of the number that goes across, as for a story stick */
+            across: string;
+            /** @description id of the number that goes up */
+            up: string;
+            /**
+             * @description ask every check of a person that either number moves, not only the two numbers’ own
+             * @default false
+             */
+            everyCheck: boolean;
+        };
+        MapRegionDto: {
+            sitterId: string;
+            /** @description `pieceId:place` */
+            placeId: string;
+            name: string;
+            /** @description served where at least tight by every check asked; a row for each value that goes up */
+            states: ("served" | "notKnown" | "lost")[][];
+            /** @description only with `full`: room to the nearest fail line, at most 300 either way */
+            rooms?: number[][];
+            /** @description the check that keeps the sitter from fitting anywhere on the map */
+            blockedBy?: string;
+        };
+        MapSharesDto: {
+            population: components["schemas"]["CrowdDto"];
+            /** @description share who fit every check asked at once, 0 to 1; null where not known; rows as `states` */
+            fits: (number | null)[][];
+        };
+        BestPairDto: {
+            across: number;
+            up: number;
+            /** @description sitters that are at least tight */
+            served: number;
+            share?: number;
+        };
+        DimensionMapDto: {
+            /** @enum {string} */
+            detail: "full" | "verdicts";
+            version: components["schemas"]["VersionStateDto"];
+            across: components["schemas"]["DimensionDto"];
+            up: components["schemas"]["DimensionDto"];
+            acrossValues: number[];
+            upValues: number[];
+            /** @description rules of a person that were looked at */
+            ruleIds: string[];
+            regions: components["schemas"]["MapRegionDto"][];
+            shares?: components["schemas"]["MapSharesDto"];
+            /** @description pairs that serve most sitters, then most of the people, then lie nearest to the present */
+            best: components["schemas"]["BestPairDto"][];
+            rules: components["schemas"]["ShownRuleDto"][];
+            confidence: number;
+            ruleVersion: string;
+            caution: string;
+        };
+        AskedVersionDto: {
+            /**
+             * Format: uuid
+             * @description another set of the production; the one of the path when absent
+             */
+            setId?: string;
+            /** @description an issued revision; the draft when absent */
+            revisionLetter?: string;
+            /** @description the draft that was seen; any when absent */
+            draftNumber?: number;
+        };
+        AskComparisonDto: {
+            from: components["schemas"]["AskedVersionDto"];
+            to: components["schemas"]["AskedVersionDto"];
+        };
+        ComparedVersionDto: {
+            /** @description of a draft */
+            draftNumber?: number;
+            /** @description of an issued revision */
+            revisionLetter?: string;
+            /** Format: uuid */
+            setId: string;
+            setName: string;
+            counts: components["schemas"]["CountsDto"];
+            /** @description probability from which its verdicts were given */
+            confidence: number;
+            ruleVersion: string;
+        };
+        DocumentChangeDto: {
+            /** @enum {string} */
+            kind: "parameter" | "piece" | "seating" | "asked" | "known-difference";
+            pieceId?: string;
+            mark?: string;
+            /** @description path of the parameter in its piece */
+            key?: string;
+            label: string;
+            /** @description as the set document holds it; absent where it holds none */
+            from?: Record<string, never> | null;
+            to?: Record<string, never> | null;
+        };
+        TurnedCheckDto: {
+            ruleId: string;
+            name: string;
+            marks: string[];
+            /** @enum {string} */
+            from: "fits" | "tight" | "wontFit" | "notKnown" | "inside" | "outside" | "gone";
+            /**
+             * @description `gone` where the second version no longer answers
+             * @enum {string}
+             */
+            to: "fits" | "tight" | "wontFit" | "notKnown" | "inside" | "outside" | "gone";
+            /** @description as the fit sheet shows it to the same reader */
+            marginBefore?: number | null;
+            marginAfter?: number | null;
+        };
+        ComparedSitterDto: {
+            gains: components["schemas"]["TurnedCheckDto"][];
+            losses: components["schemas"]["TurnedCheckDto"][];
+            /** @description checks that keep their verdict */
+            kept: number;
+            sitterId: string;
+            name: string;
+        };
+        ComparedChecksDto: {
+            gains: components["schemas"]["TurnedCheckDto"][];
+            losses: components["schemas"]["TurnedCheckDto"][];
+            /** @description checks that keep their verdict */
+            kept: number;
+        };
+        ComparisonDto: {
+            /** @enum {string} */
+            detail: "full" | "verdicts";
+            from: components["schemas"]["ComparedVersionDto"];
+            to: components["schemas"]["ComparedVersionDto"];
+            changes: components["schemas"]["DocumentChangeDto"][];
+            /** @description who sits in both */
+            sitters: components["schemas"]["ComparedSitterDto"][];
+            /** @description pieces and ways */
+            pieces: components["schemas"]["ComparedChecksDto"];
+            /** @description names of who sits in the second only */
+            joined: string[];
+            /** @description names of who sits in the first only */
+            left: string[];
+            caution: string;
+        };
+        StrangerDto: {
+            /**
+             * @default mixed
+             * @enum {string}
+             */
+            bodyData: "women" | "men" | "mixed";
+            statureMm?: number | null;
+            /**
+             * @default told
+             * @enum {string}
+             */
+            statureSource: "measured" | "told";
+            weightKg?: number | null;
+            /** @description whole years */
+            age?: number | null;
+            /** @description all that was taken with a tape; replaces what was there */
+            measured?: {
+                sitting_height?: {
+                    mm: number;
+                    takenBy?: string;
+                    /** Format: date */
+                    takenOn?: string;
+                };
+                eye_height_sitting?: {
+                    mm: number;
+                    takenBy?: string;
+                    /** Format: date */
+                    takenOn?: string;
+                };
+                acromial_height_sitting?: {
+                    mm: number;
+                    takenBy?: string;
+                    /** Format: date */
+                    takenOn?: string;
+                };
+                elbow_rest_height?: {
+                    mm: number;
+                    takenBy?: string;
+                    /** Format: date */
+                    takenOn?: string;
+                };
+                popliteal_height?: {
+                    mm: number;
+                    takenBy?: string;
+                    /** Format: date */
+                    takenOn?: string;
+                };
+                knee_height_sitting?: {
+                    mm: number;
+                    takenBy?: string;
+                    /** Format: date */
+                    takenOn?: string;
+                };
+                buttock_popliteal_length?: {
+                    mm: number;
+                    takenBy?: string;
+                    /** Format: date */
+                    takenOn?: string;
+                };
+                buttock_knee_length?: {
+                    mm: number;
+                    takenBy?: string;
+                    /** Format: date */
+                    takenOn?: string;
+                };
+                thigh_clearance?: {
+                    mm: number;
+                    takenBy?: string;
+                    /** Format: date */
+                    takenOn?: string;
+                };
+                hip_breadth_sitting?: {
+                    mm: number;
+                    takenBy?: string;
+                    /** Format: date */
+                    takenOn?: string;
+                };
+                bideltoid_breadth?: {
+                    mm: number;
+                    takenBy?: string;
+                    /** Format: date */
+                    takenOn?: string;
+                };
+                forearm_forearm_breadth?: {
+                    mm: number;
+                    takenBy?: string;
+                    /** Format: date */
+                    takenOn?: string;
+                };
+                abdominal_extension_depth_sitting?: {
+                    mm: number;
+                    takenBy?: string;
+                    /** Format: date */
+                    takenOn?: string;
+                };
+            };
+            /** @default 25 */
+            shoeMm: number;
+            /**
+             * @default light
+             * @enum {string}
+             */
+            clothing: "light" | "medium" | "heavy";
+        };
+        AskStandInDto: {
+            /** @description `pieceId:place` where a cast member sits */
+            placeId: string;
+            /**
+             * Format: uuid
+             * @description a cast member who tries the seat; either this or `person`
+             */
+            castId?: string;
+            /** @description somebody else who tries it; a stature is needed */
+            person?: components["schemas"]["StrangerDto"];
+            /** @description for a draft: the one that was seen; any when absent */
+            draftNumber?: number;
+        };
+        PartDifferenceDto: {
+            best: number;
+            low: number;
+            /** @description with `low` the range that holds 90 in 100 */
+            high: number;
+            key: string;
+        };
+        SpreadDto: {
+            best: number;
+            low: number;
+            /** @description with `low` the range that holds 90 in 100 */
+            high: number;
+        };
+        RoomsDto: {
+            castMember: number;
+            standIn: number;
+        };
+        TakeDto: {
+            /** @enum {string} */
+            of: "castMember" | "standIn";
+            key: string;
+        };
+        StandInCheckDto: {
+            ruleId: string;
+            /**
+             * @description `cannotTell`: the sit cannot answer this check
+             * @enum {string}
+             */
+            answer: "carriesOver" | "withDifference" | "cannotTell" | "notAsked";
+            /** @description why it is not asked */
+            reason?: string;
+            /** @description stand-in less cast member */
+            parts: components["schemas"]["PartDifferenceDto"][];
+            /** @description added to the room that the stand-in has, gives that of the cast member */
+            difference?: components["schemas"]["SpreadDto"];
+            /** @description room to the nearest fail line by the drawing */
+            room?: components["schemas"]["RoomsDto"];
+            /**
+             * @description what an answer that carries over rests on: bodies alike in what is read, or only that both have room, or neither
+             * @enum {string}
+             */
+            because?: "bodies" | "room";
+            /** @description the bodies differ by more than `littleSaidMm`: whatever the answer, the sit says little */
+            saysLittle: boolean;
+            /** @description the sit by itself would show the wrong thing */
+            misleads: boolean;
+            /** @enum {string} */
+            side: "lessRoom" | "moreRoom" | "same" | "notKnown";
+            /** @description measurement that narrows the difference most */
+            take?: components["schemas"]["TakeDto"];
+        };
+        StandInDto: {
+            version: components["schemas"]["VersionStateDto"];
+            placeId: string;
+            /** Format: uuid */
+            castId: string;
+            checks: components["schemas"]["StandInCheckDto"][];
+            /** @description difference of two bodies beyond which a sit says little */
+            littleSaidMm: number;
+            rules: components["schemas"]["ShownRuleDto"][];
+            confidence: number;
+            ruleVersion: string;
+            caution: string;
         };
         UpholstererDto: {
             /** Format: uuid */
@@ -6095,6 +6736,353 @@ export interface operations {
                     [name: string]: unknown;
                 };
                 content?: never;
+            };
+            /** @description what went wrong (RFC 9457) */
+            default: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemBody"];
+                };
+            };
+        };
+    };
+    StorySticks_ofDraft: {
+        parameters: {
+            query?: never;
+            header?: never;
+            path: {
+                productionId: string;
+                setId: string;
+            };
+            cookie?: never;
+        };
+        requestBody: {
+            content: {
+                "application/json": components["schemas"]["AskStickDto"];
+            };
+        };
+        responses: {
+            200: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["StoryStickDto"];
+                };
+            };
+            /** @description the draft moved on */
+            409: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content?: never;
+            };
+            /** @description what went wrong (RFC 9457) */
+            default: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemBody"];
+                };
+            };
+        };
+    };
+    StorySticks_ofRevision: {
+        parameters: {
+            query?: never;
+            header?: never;
+            path: {
+                productionId: string;
+                setId: string;
+                letter: string;
+            };
+            cookie?: never;
+        };
+        requestBody: {
+            content: {
+                "application/json": components["schemas"]["AskStickDto"];
+            };
+        };
+        responses: {
+            200: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["StoryStickDto"];
+                };
+            };
+            /** @description what went wrong (RFC 9457) */
+            default: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemBody"];
+                };
+            };
+        };
+    };
+    StorySticks_draftPdf: {
+        parameters: {
+            query?: never;
+            header?: never;
+            path: {
+                productionId: string;
+                setId: string;
+            };
+            cookie?: never;
+        };
+        requestBody: {
+            content: {
+                "application/json": components["schemas"]["AskStickDto"];
+            };
+        };
+        responses: {
+            200: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/pdf": string;
+                };
+            };
+            /** @description the draft moved on */
+            409: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content?: never;
+            };
+            /** @description what went wrong (RFC 9457) */
+            default: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemBody"];
+                };
+            };
+        };
+    };
+    StorySticks_revisionPdf: {
+        parameters: {
+            query?: never;
+            header?: never;
+            path: {
+                productionId: string;
+                setId: string;
+                letter: string;
+            };
+            cookie?: never;
+        };
+        requestBody: {
+            content: {
+                "application/json": components["schemas"]["AskStickDto"];
+            };
+        };
+        responses: {
+            200: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/pdf": string;
+                };
+            };
+            /** @description what went wrong (RFC 9457) */
+            default: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemBody"];
+                };
+            };
+        };
+    };
+    DimensionMaps_ofDraft: {
+        parameters: {
+            query?: never;
+            header?: never;
+            path: {
+                productionId: string;
+                setId: string;
+            };
+            cookie?: never;
+        };
+        requestBody: {
+            content: {
+                "application/json": components["schemas"]["AskMapDto"];
+            };
+        };
+        responses: {
+            200: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["DimensionMapDto"];
+                };
+            };
+            /** @description the draft moved on */
+            409: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content?: never;
+            };
+            /** @description what went wrong (RFC 9457) */
+            default: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemBody"];
+                };
+            };
+        };
+    };
+    DimensionMaps_ofRevision: {
+        parameters: {
+            query?: never;
+            header?: never;
+            path: {
+                productionId: string;
+                setId: string;
+                letter: string;
+            };
+            cookie?: never;
+        };
+        requestBody: {
+            content: {
+                "application/json": components["schemas"]["AskMapDto"];
+            };
+        };
+        responses: {
+            200: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["DimensionMapDto"];
+                };
+            };
+            /** @description what went wrong (RFC 9457) */
+            default: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemBody"];
+                };
+            };
+        };
+    };
+    Comparisons_compare: {
+        parameters: {
+            query?: never;
+            header?: never;
+            path: {
+                productionId: string;
+                setId: string;
+            };
+            cookie?: never;
+        };
+        requestBody: {
+            content: {
+                "application/json": components["schemas"]["AskComparisonDto"];
+            };
+        };
+        responses: {
+            200: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["ComparisonDto"];
+                };
+            };
+            /** @description what went wrong (RFC 9457) */
+            default: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemBody"];
+                };
+            };
+        };
+    };
+    StandIns_ofDraft: {
+        parameters: {
+            query?: never;
+            header?: never;
+            path: {
+                productionId: string;
+                setId: string;
+            };
+            cookie?: never;
+        };
+        requestBody: {
+            content: {
+                "application/json": components["schemas"]["AskStandInDto"];
+            };
+        };
+        responses: {
+            200: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["StandInDto"];
+                };
+            };
+            /** @description the draft moved on */
+            409: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content?: never;
+            };
+            /** @description what went wrong (RFC 9457) */
+            default: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemBody"];
+                };
+            };
+        };
+    };
+    StandIns_ofRevision: {
+        parameters: {
+            query?: never;
+            header?: never;
+            path: {
+                productionId: string;
+                setId: string;
+                letter: string;
+            };
+            cookie?: never;
+        };
+        requestBody: {
+            content: {
+                "application/json": components["schemas"]["AskStandInDto"];
+            };
+        };
+        responses: {
+            200: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["StandInDto"];
+                };
             };
             /** @description what went wrong (RFC 9457) */
             default: {

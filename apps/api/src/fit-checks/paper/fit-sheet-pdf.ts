@@ -33,7 +33,12 @@ export function fitSheetPdf(input: FitSheetPaper): Buffer {
   return pack.bytes();
 }
 
-function titleCells(input: FitSheetPaper, number: number, count: number): TitleCell[] {
+/** The title block of a sheet of verdicts: of what, whose, in which units, and which version. */
+export function titleCells(
+  input: Omit<FitSheetPaper, 'sheet' | 'ruleBook' | 'confidence' | 'paper'>,
+  number: number,
+  count: number,
+): TitleCell[] {
   const { state, workshop, style, timeZone } = input;
   const day = new Intl.DateTimeFormat('en-GB', { dateStyle: 'long', timeZone }).format(input.at);
   const issued = state.kind === 'revision';
