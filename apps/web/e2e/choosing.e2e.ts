@@ -139,7 +139,7 @@ describe('choosing dimensions for people known by their height alone', () => {
 
   it('shows on a story stick who fits where, by the keyboard too', async () => {
     await page.goto(`${room}/stick?d=seat-height`);
-    const bob = page.getByRole('slider');
+    const bob = page.getByRole('slider', { name: 'Seat height, pressed' });
     await bob.waitFor();
     await expect.poll(() => page.getByText(/in 100/).count()).toBeGreaterThan(0);
     const said = await bob.getAttribute('aria-valuetext');
@@ -149,8 +149,11 @@ describe('choosing dimensions for people known by their height alone', () => {
     await expectAccessible(page);
   });
 
-  it('takes the suggestion of the stick as one step', async () => {
+  it('takes a value that was tried on the stick as one step', async () => {
     await page.goto(`${room}/stick?d=seat-height`);
+    await page.getByRole('slider', { name: 'Seat height, pressed' }).focus();
+    await page.keyboard.press('ArrowLeft');
+    await page.getByRole('button', { name: /^Back to / }).waitFor();
     await page.getByRole('button', { name: /^Take / }).click();
     await page.getByRole('button', { name: /^Undo Seat height, pressed / }).waitFor();
     await untilSaved(page);

@@ -121,6 +121,8 @@ function StartMark({
   const { x, rowsTop, tapeBottom } = layout;
   const at = x(start);
   const before = start < shown;
+  // The bob and its ring cover what is close to it.
+  const beside = before ? Math.min(at - 8, x(shown) - BESIDE_BOB) : Math.max(at + 8, x(shown) + BESIDE_BOB);
   return (
     <g>
       <path
@@ -131,7 +133,7 @@ function StartMark({
       />
       <path d={`M${at - 4} ${tapeBottom + 8}h8`} stroke="var(--color-ink-2)" strokeWidth={1.4} />
       <Held
-        x={before ? at - 8 : at + 8}
+        x={beside}
         y={tapeBottom + 24}
         before={before}
         layout={layout}
@@ -142,6 +144,7 @@ function StartMark({
   );
 }
 
+const BESIDE_BOB = 28;
 const LINE = 17;
 const FIRST_LINE = 15;
 

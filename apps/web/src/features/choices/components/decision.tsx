@@ -15,7 +15,7 @@ import type { TriedValues } from '../tried-values.ts';
 import { moreWords, shareAt, type ShareCurves } from '../use-share-curve.ts';
 import { movingWords } from '../words.ts';
 import { KeepChoice } from './keep-choice.tsx';
-import { goesBack, TRIAL_MARK } from './plumb-slider.tsx';
+import { focusLine, goesBack, staysNear, TRIAL_MARK } from './plumb-slider.tsx';
 import { NothingBetter } from './nothing-better.tsx';
 import { RailOffer } from './rail-offer.tsx';
 import { TakeChoice } from './take-choice.tsx';
@@ -91,14 +91,20 @@ export const Decision = memo(function Decision({
       `${dimension.label} kept at ${now}`,
     );
   };
+  const leave = () => {
+    onLeave();
+    focusLine();
+  };
   const take = () => {
-    if (trying !== undefined) onTake();
-    else if (next && target !== undefined) replace?.(next, `${dimension.label} ${now} to ${show(target)}`);
+    if (trying !== undefined) {
+      onTake();
+      focusLine();
+    } else if (next && target !== undefined) replace?.(next, `${dimension.label} ${now} to ${show(target)}`);
   };
   const back = (event: KeyboardEvent) => {
     if (trying === undefined || !goesBack(event)) return;
     event.preventDefault();
-    onLeave();
+    leave();
   };
   return (
     <aside aria-label="The choice" className="min-w-0 desk:row-span-2">
@@ -115,8 +121,11 @@ export const Decision = memo(function Decision({
       </p>
       {target !== undefined && next && effects ? (
         // Escape in here ends the trial, as it does on the line.
-        // eslint-disable-next-line jsx-a11y/no-static-element-interactions
-        <div onKeyDown={back} {...(trying !== undefined && TRIAL_MARK)}>
+        <div
+          onKeyDown={back}
+          onBlur={(event) => trying !== undefined && !staysNear(event) && onTake()}
+          {...(trying !== undefined && TRIAL_MARK)}
+        >
           <TakeChoice
             value={show(target)}
             along={alongWords(dimension)}
@@ -126,7 +135,7 @@ export const Decision = memo(function Decision({
             onTake={replace && take}
           >
             {trying !== undefined && (
-              <Button onMouseDown={(event) => event.preventDefault()} onClick={onLeave}>
+              <Button onMouseDown={(event) => event.preventDefault()} onClick={leave}>
                 <span>
                   Back to <Measure text={now} />
                 </span>

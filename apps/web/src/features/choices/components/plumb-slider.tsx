@@ -25,11 +25,17 @@ interface PlumbSliderProps {
 
 const BOB = 44;
 
-/** Where the focus may go while a value is still being tried. */
+/** Where the focus may go while a value is still being tried; the bob itself is such a place. */
 export const TRIAL_MARK = { 'data-stick-trial': '' };
 
-const staysNear = ({ relatedTarget }: FocusEvent): boolean =>
+/** The focus moves between the line and what is said of the value under the hand. */
+export const staysNear = ({ relatedTarget }: FocusEvent): boolean =>
   relatedTarget instanceof Element && relatedTarget.closest('[data-stick-trial]') !== null;
+
+/** Gives the focus back to the line, where a button that had it goes. */
+export function focusLine(): void {
+  document.querySelector<HTMLElement>('[data-stick-bob]')?.focus({ preventScroll: true });
+}
 
 /** Keys that end a trial and go back: Escape, and undo while nothing is written yet. */
 export const goesBack = ({ key, ctrlKey, metaKey, shiftKey, altKey }: KeyboardEvent): boolean =>
@@ -119,6 +125,7 @@ export function PlumbSlider({
         aria-valuetext={words}
         aria-describedby={describedBy}
         data-stick-bob
+        {...TRIAL_MARK}
         className="absolute touch-none cursor-ew-resize rounded-sm"
         style={{ left: x(shown) - BOB / 2, width: BOB, top: tapeBottom - 4, height: height - tapeBottom + 4 }}
         onKeyDown={onKeyDown}

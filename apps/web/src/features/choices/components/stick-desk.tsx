@@ -119,7 +119,7 @@ export function StickDesk({ tried, stick, rule, crowd, asked, onCrowd }: StickDe
             onLeave={values.leave}
           />
         </div>
-        <p id={aboutKeys} className="text-sm text-ink-2">
+        <p id={aboutKeys} className="mt-2 text-sm text-ink-2">
           + room left, − short. Left and right keys move the plumb line by{' '}
           <Measure text={exactValue(tried.step, unit, style)} />; Enter writes the value, Escape goes back to{' '}
           <Measure text={exactValue(present, unit, style)} />.
