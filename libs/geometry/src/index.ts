@@ -33,7 +33,9 @@ export * from './situation/route-starts.ts';
 export type { Spot } from './situation/clear-floor.ts';
 export type { FigureMeans } from './mannequin/figure.ts';
 export type { MannequinJoints } from './mannequin/joints.ts';
-export { MANNEQUIN_TAGS, mannequinMesh, type MannequinMesh } from './mannequin/mesh.ts';
+export { MANNEQUIN_TAGS, mannequinMesh, type MannequinDetail, type MannequinMesh } from './mannequin/mesh.ts';
+export { bodyRange, ghostMeshes, type BodyRange } from './mannequin/body-range.ts';
+export { childFigure, type ChildFigure } from './mannequin/child-figure.ts';
 export {
   poseMannequin,
   type MannequinPose,

@@ -1,9 +1,9 @@
 import type { Vec3 } from '../parts/part.ts';
 import type { Figure } from './figure.ts';
 import { thighSurface } from './leg-sections.ts';
-import { HIP_FORWARD_MM, HIP_HEIGHT_MM } from './stance.ts';
+import { unbendPoint, type TrunkBend } from './stance.ts';
 import { trunkGap, trunkLevels, type TrunkLevel } from './trunk-profile.ts';
-import { mix, mixPoints, turnAboutX } from './vector.ts';
+import { mix, mixPoints } from './vector.ts';
 
 /** Something level the forearms can lie on, in the body frame. */
 export interface Rest {
@@ -18,26 +18,25 @@ export interface Obstacles {
   figure: Figure;
   levels: readonly TrunkLevel[];
   thighTop: (x: number, z: number) => number;
-  trunkRad: number;
+  bend: TrunkBend;
   shoulder: Vec3;
   rest: Rest | undefined;
 }
 
 export const obstacles = (
   figure: Figure,
-  trunkRad: number,
+  bend: TrunkBend,
   shoulder: Vec3,
   rest: Rest | undefined,
 ): Obstacles => ({
   figure,
   levels: trunkLevels(figure),
   thighTop: thighSurface(figure),
-  trunkRad,
+  bend,
   shoulder,
   rest,
 });
 
-const HIP_AXIS: Vec3 = [0, HIP_HEIGHT_MM, HIP_FORWARD_MM];
 const UPPER_SAMPLES = [0.5, 0.65, 0.8];
 const FOREARM_SAMPLES = [0, 0.15, 0.3, 0.45, 0.6, 0.75, 0.9, 1];
 /** A limb this much into something counts as much as one radian of swivel. */
@@ -49,11 +48,11 @@ const AIR_MM = 3;
  * it is clear.
  */
 export function overlap(elbow: Vec3, wrist: Vec3, among: Obstacles): number {
-  const { figure, levels, thighTop, trunkRad, shoulder, rest } = among;
+  const { figure, levels, thighTop, bend, shoulder, rest } = among;
   const { radius } = figure;
   let most = 0;
   const look = (p: Vec3, r: number): void => {
-    const upright = trunkRad === 0 ? p : turnAboutX(p, HIP_AXIS, -trunkRad);
+    const upright = unbendPoint(figure, bend, p);
     most = Math.max(most, r + AIR_MM - trunkGap(levels, upright), 0.9 * r - upright[2]);
   };
   for (const t of UPPER_SAMPLES) look(mixPoints(shoulder, elbow, t), mix(radius.arm, radius.elbow, t) * 0.97);

@@ -5,11 +5,13 @@ import {
   armLinks,
   bicepsTuck,
   direction,
-  leanPoint,
+  bendPoint,
+  chestRad,
   mirror,
   shoulderLineMm,
   type ArmStance,
   type Stance,
+  type TrunkBend,
 } from './stance.ts';
 import {
   add,
@@ -38,14 +40,14 @@ function armRing(centre: Vec3, outward: Vec3, front: Vec3, behind = 1): Vec3[] {
 }
 
 /** Section points of a left arm. Ring 0 is the armhole, given hanging and leaned with the trunk. */
-function armPoints(f: Figure, arm: ArmStance, trunkRad: number, armhole: Vec3[]) {
+function armPoints(f: Figure, arm: ArmStance, bend: TrunkBend, armhole: Vec3[]) {
   const { k, radius, Ha } = f;
   const { shoulder, elbow, wrist } = arm;
   const u = direction(shoulder, elbow);
   const g = direction(elbow, wrist);
   const hangLateral: Vec3 = [1, 0, 0];
-  const hangDown = turnAboutX([0, -1, 0], [0, 0, 0], trunkRad);
-  const hangFront = turnAboutX([0, 0, 1], [0, 0, 0], trunkRad);
+  const hangDown = turnAboutX([0, -1, 0], [0, 0, 0], chestRad(bend));
+  const hangFront = turnAboutX([0, 0, 1], [0, 0, 0], chestRad(bend));
   const lateral = unit(cross(g, u), hangLateral);
   const frontOf = (axis: Vec3, side: Vec3): Vec3 => unit(cross(axis, side));
   const { axis, angleRad } = turnBetween(
@@ -59,8 +61,8 @@ function armPoints(f: Figure, arm: ArmStance, trunkRad: number, armhole: Vec3[])
   const y5 = mix(0.755, 0.745, f.woman) * f.AH;
   const w5 = f.CB / 2 + mix(8, 5, f.woman);
   const zS = shoulderLineMm(f);
-  const outside = leanPoint([f.BD / 2, 0.865 * f.AH, zS], trunkRad);
-  const inside = leanPoint([w5 + 15, y5 - 16, zS], trunkRad);
+  const outside = bendPoint(f, bend, [f.BD / 2, 0.865 * f.AH, zS]);
+  const inside = bendPoint(f, bend, [w5 + 15, y5 - 16, zS]);
   const deltoid = armRing(
     mixPoints(outside, inside, 0.5),
     scale(sub(outside, inside), 0.5),
@@ -71,7 +73,7 @@ function armPoints(f: Figure, arm: ArmStance, trunkRad: number, armhole: Vec3[])
   const e = radius.elbow;
   const links = armLinks(f);
   const tuck = bicepsTuck(f);
-  const bend = clamp(Math.acos(clamp(dot(u, g), -1, 1)) / (Math.PI / 2), 0, 1);
+  const bent = clamp(Math.acos(clamp(dot(u, g), -1, 1)) / (Math.PI / 2), 0, 1);
   const front = frontOf(u, lateral);
   const onUpper = (t: number): Vec3 => along(shoulder, u, t * links.upperMm);
   const biceps = armRing(
@@ -80,7 +82,7 @@ function armPoints(f: Figure, arm: ArmStance, trunkRad: number, armhole: Vec3[])
     scale(front, 1.06 * r),
   );
   const aboveElbow = armRing(
-    onUpper(mix(0.83, 0.7, bend)),
+    onUpper(mix(0.83, 0.7, bent)),
     scale(lateral, mix(r, e, 0.75)),
     scale(front, mix(r, e, 0.6)),
   );
@@ -97,7 +99,7 @@ function armPoints(f: Figure, arm: ArmStance, trunkRad: number, armhole: Vec3[])
       scale(frontOf(g, side), through),
     );
   };
-  const below = onForearm(mix(0.26, 0.4, bend), 0.12, radius.forearm, radius.forearm);
+  const below = onForearm(mix(0.26, 0.4, bent), 0.12, radius.forearm, radius.forearm);
   const atWrist = onForearm(1, 0.85, 1.12 * radius.wrist, 0.86 * radius.wrist);
   const onHand = (t: number, across: number, through: number, curl: number): Vec3[] =>
     armRing(
@@ -151,7 +153,7 @@ export function writeArms(f: Figure, stance: Stance, cage: Cage, points: Float64
     const read = (id: number): Vec3 => flip([points[id * 3]!, points[id * 3 + 1]!, points[id * 3 + 2]!]);
     const write = (id: number, p: Vec3): void => points.set(flip(p), id * 3);
     const armhole = cage.arms[side][0]!.map(read);
-    const { rings, finger, thumb } = armPoints(f, stance.arms[side], stance.trunkRad, armhole);
+    const { rings, finger, thumb } = armPoints(f, stance.arms[side], stance, armhole);
     rings.forEach((ring, r) => ring.forEach((p, c) => write(cage.arms[side][r]![c]!, p)));
     thumb.forEach((ring, r) => ring.forEach((p, c) => write(cage.thumbs[side][r]![c]!, p)));
     write(cage.fingers[side], finger);

@@ -3,7 +3,7 @@ import type { Figure } from './figure.ts';
 import { reachFor, type Reach } from './limb-reach.ts';
 import { obstacles, overlap, type Rest } from './arm-clearance.ts';
 import { thighSurface } from './leg-sections.ts';
-import { armLinks, leanPoint, restKnee, restShoulder, type ArmStance } from './stance.ts';
+import { armLinks, bendPoint, restKnee, restShoulder, type ArmStance, type TrunkBend } from './stance.ts';
 import { bellyFront } from './trunk-profile.ts';
 import { along, cross, length, mix, sub, unit } from './vector.ts';
 
@@ -18,10 +18,10 @@ interface Wish {
 }
 
 /** The least turned and least stretched arm that is clear of trunk, back and table. */
-function bestReach(f: Figure, trunkRad: number, wishes: Wish[], rest?: Rest): Reach {
-  const shoulder = leanPoint(restShoulder(f), trunkRad);
+function bestReach(f: Figure, bend: TrunkBend, wishes: Wish[], rest?: Rest): Reach {
+  const shoulder = bendPoint(f, bend, restShoulder(f));
   const { upperMm, forearmMm } = armLinks(f);
-  const among = obstacles(f, trunkRad, shoulder, rest);
+  const among = obstacles(f, bend, shoulder, rest);
   let best: { reach: Reach; cost: number } | undefined;
   for (const { wrist, dislike } of wishes) {
     const straightness = length(sub(wrist, shoulder)) / (upperMm + forearmMm);
@@ -37,11 +37,11 @@ function bestReach(f: Figure, trunkRad: number, wishes: Wish[], rest?: Rest): Re
   return best?.reach ?? reachFor(shoulder, shoulder, upperMm, forearmMm, POLE);
 }
 
-function armAt(f: Figure, trunkRad: number, reach: Reach, hand: Vec3, handBack: Vec3): ArmStance {
+function armAt(f: Figure, bend: TrunkBend, reach: Reach, hand: Vec3, handBack: Vec3): ArmStance {
   const fingers = unit(hand);
   const side = unit(cross(handBack, fingers), [1, 0, 0]);
   return {
-    shoulder: leanPoint(restShoulder(f), trunkRad),
+    shoulder: bendPoint(f, bend, restShoulder(f)),
     elbow: reach.middle,
     wrist: reach.end,
     hand: fingers,
@@ -53,7 +53,7 @@ const steps = (from: number, to: number, step: number): number[] =>
   Array.from({ length: Math.max(1, Math.floor((to - from) / step) + 1) }, (_, i) => from + i * step);
 
 /** Hands on the thighs, apart from each other, in front of the belly. */
-export function armOnLap(f: Figure, trunkRad: number): ArmStance {
+export function armOnLap(f: Figure, bend: TrunkBend): ArmStance {
   const kneeX = restKnee(f)[0];
   const thighTop = thighSurface(f);
   const height = (x: number, z: number): number => thighTop(x, z) + 0.9 * f.radius.wrist + 4;
@@ -65,13 +65,13 @@ export function armOnLap(f: Figure, trunkRad: number): ArmStance {
       return { wrist: [x, height(x, z), z], dislike: 0.2 * i };
     }),
   );
-  const reach = bestReach(f, trunkRad, wishes);
+  const reach = bestReach(f, bend, wishes);
   const wrist = reach.end;
   const inwards = Math.min(0.28, (wrist[0] - 0.5 * f.Ha - 4) / f.Ha + 0.1) * f.Ha;
   const aside = wrist[0] - inwards;
   const middle = height(mix(wrist[0], aside, 0.5), wrist[2] + 0.5 * f.Ha) - wrist[1];
   const tip = height(aside, wrist[2] + f.Ha) - wrist[1];
-  return armAt(f, trunkRad, reach, [-inwards, Math.max(tip - 8, 2 * middle - 8), f.Ha], [0.12, 1, 0.1]);
+  return armAt(f, bend, reach, [-inwards, Math.max(tip - 8, 2 * middle - 8), f.Ha], [0.12, 1, 0.1]);
 }
 
 /**
@@ -79,8 +79,8 @@ export function armOnLap(f: Figure, trunkRad: number): ArmStance {
  *
  * @returns the arm, or `undefined` when the table is out of reach or too high to lie on
  */
-export function armOnTable(f: Figure, trunkRad: number, rest: Rest, up: Vec3): ArmStance | undefined {
-  const shoulder = leanPoint(restShoulder(f), trunkRad);
+export function armOnTable(f: Figure, bend: TrunkBend, rest: Rest, up: Vec3): ArmStance | undefined {
+  const shoulder = bendPoint(f, bend, restShoulder(f));
   if (rest.topMm > shoulder[1] - 120 || rest.topMm < 0.5 * f.TC) return undefined;
   const { upperMm, forearmMm } = armLinks(f);
   const withinReach = [0.34, 0.44, 0.54].flatMap((out, i) =>
@@ -92,6 +92,6 @@ export function armOnTable(f: Figure, trunkRad: number, rest: Rest, up: Vec3): A
       .filter(({ wrist }) => length(sub(wrist, shoulder)) < 0.985 * (upperMm + forearmMm)),
   );
   if (withinReach.length === 0) return undefined;
-  const reach = bestReach(f, trunkRad, withinReach, rest);
-  return armAt(f, trunkRad, reach, along(along([0, 0, 1], [1, 0, 0], -0.4), up, -0.06), up);
+  const reach = bestReach(f, bend, withinReach, rest);
+  return armAt(f, bend, reach, along(along([0, 0, 1], [1, 0, 0], -0.4), up, -0.06), up);
 }

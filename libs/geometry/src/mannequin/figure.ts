@@ -4,6 +4,36 @@ import { clamp, mix } from './vector.ts';
 /** Body measures (mm, ISO 7250-1 names) or a subset of them, as the mannequin reads them. */
 export type FigureMeans = Partial<Record<MeasureKey, number>>;
 
+/** The measures that shape a mannequin. */
+export const FIGURE_KEYS = [
+  'stature',
+  'weight_kg',
+  'sitting_height',
+  'eye_height_sitting',
+  'acromial_height_sitting',
+  'elbow_rest_height',
+  'popliteal_height',
+  'knee_height_sitting',
+  'buttock_popliteal_length',
+  'buttock_knee_length',
+  'thigh_clearance',
+  'hip_breadth_sitting',
+  'bideltoid_breadth',
+  'forearm_forearm_breadth',
+  'biacromial_breadth',
+  'abdominal_extension_depth_sitting',
+  'chest_depth',
+  'chest_breadth',
+  'waist_breadth',
+  'foot_length',
+  'foot_breadth',
+  'head_length',
+  'head_breadth',
+  'lateral_malleolus_height',
+  'forearm_hand_length',
+  'hand_length',
+] as const satisfies readonly MeasureKey[];
+
 /**
  * The measures of one body by the short names the sections use, and the radii derived from them.
  * All lengths in millimetres. ISO initials: SH sitting height, EH eye, AH acromion, ER elbow rest,

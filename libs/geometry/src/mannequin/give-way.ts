@@ -1,7 +1,15 @@
 import type { Vec3 } from '../parts/part.ts';
 import type { Figure } from './figure.ts';
 import { SOFT, type SkinLevel } from './skin.ts';
-import { armLinks, bicepsTuck, direction, leanPoint, type ArmStance, type Stance } from './stance.ts';
+import {
+  armLinks,
+  bendPoint,
+  bicepsTuck,
+  direction,
+  waistPivot,
+  type ArmStance,
+  type Stance,
+} from './stance.ts';
 import { along, clamp, cross, length, mix, sub, unit } from './vector.ts';
 
 interface Cone {
@@ -68,7 +76,7 @@ const MOST_STEPS = 24;
  * @param points - skin points of `at` in the body frame, changed in place
  */
 export function giveWay(points: Float64Array, at: SkinLevel, figure: Figure, stance: Stance): void {
-  const middle = leanPoint([0, 300, 0.45 * figure.AD], stance.trunkRad);
+  const middle = bendPoint(figure, stance, waistPivot(figure), 1, 0);
   const sides = stance.arms.map((arm) => armCones(figure, arm));
   const reach = sides.map((cones) => {
     const low: number[] = [];

@@ -2,7 +2,15 @@ import type { Vec3 } from '../parts/part.ts';
 import { toRoom, type BodyPlacement } from './body-placement.ts';
 import type { Figure } from './figure.ts';
 import { legLine } from './leg-sections.ts';
-import { HIP_FORWARD_MM, HIP_HEIGHT_MM, leanPoint, mirror, shoulderLineMm, type Stance } from './stance.ts';
+import {
+  HIP_FORWARD_MM,
+  HIP_HEIGHT_MM,
+  bendPoint,
+  chestRad,
+  mirror,
+  shoulderLineMm,
+  type Stance,
+} from './stance.ts';
 import { add, along, turnAboutX, turnAboutY } from './vector.ts';
 
 type Paired = 'shoulder' | 'elbow' | 'wrist' | 'fingertip' | 'hip' | 'knee' | 'ankle' | 'heel' | 'toe';
@@ -18,12 +26,12 @@ export type MannequinJoints = {
 /** Joint centres of a body in a stance, in the room. */
 export function bodyJoints(f: Figure, stance: Stance, placement: BodyPlacement): MannequinJoints {
   const zS = shoulderLineMm(f);
-  const giveBack = stance.headRad - stance.trunkRad;
-  const neck = leanPoint([0, f.AH + 20, zS - 14], stance.trunkRad);
+  const giveBack = stance.headRad - chestRad(stance);
+  const neck = bendPoint(f, stance, [0, f.AH + 20, zS - 14]);
   const onHead = (p: Vec3): Vec3 => {
-    const skullBase: Vec3 = leanPoint([0, f.EH - 0.35 * (f.SH - f.EH), zS], stance.trunkRad);
+    const skullBase: Vec3 = bendPoint(f, stance, [0, f.EH - 0.35 * (f.SH - f.EH), zS]);
     const pivot = turnAboutX(skullBase, neck, 0.4 * giveBack);
-    return turnAboutX(turnAboutX(leanPoint(p, stance.trunkRad), neck, 0.4 * giveBack), pivot, 0.6 * giveBack);
+    return turnAboutX(turnAboutX(bendPoint(f, stance, p), neck, 0.4 * giveBack), pivot, 0.6 * giveBack);
   };
   const leg = legLine(f, stance);
   const foot = (p: Vec3): Vec3 =>

@@ -29,7 +29,7 @@ interface ThighRing {
   half: number;
 }
 
-function thighRings(f: Figure): [ThighRing, ThighRing, ThighRing] {
+export function thighRings(f: Figure): [ThighRing, ThighRing, ThighRing] {
   const h = f.HB / 2;
   const t = f.KH - f.PH;
   const belly = 30 + 0.02 * f.CD + f.AD;
@@ -63,7 +63,10 @@ export function thighSurface(f: Figure): (x: number, z: number) => number {
 }
 
 /** Sections of the left leg as measured: thigh along the seat, shin upright. Rings 1 to 12, then the toe. */
-function restLeg(f: Figure, shoeMm: number): { rings: Vec3[][]; toe: Vec3 } {
+function restLeg(
+  f: Figure,
+  { shoeMm, forefootMm }: Pick<Stance, 'shoeMm' | 'forefootMm'>,
+): { rings: Vec3[][]; toe: Vec3 } {
   const { PH, BPL, BKL, MH, FL, FB, k, radius } = f;
   const t = f.KH - PH;
   const kneeX = restKnee(f)[0];
@@ -76,8 +79,14 @@ function restLeg(f: Figure, shoeMm: number): { rings: Vec3[][]; toe: Vec3 } {
   const [first, second, third] = thighRings(f);
   const thigh = ({ z, top, centreX, half }: ThighRing, inward = 1): Vec3[] =>
     between([centreX, top, z], [centreX, -8, z], half, inward);
+  // On a heel the instep runs down to the ball; the ankle stays up.
+  const drop = (share: number): number => (shoeMm - forefootMm) * clamp((share - 0.2) / 0.5, 0, 1);
   const foot = (share: number, height: number, half: number): Vec3[] =>
-    between([kneeX, sole + height * MH, heel + share * FL], [kneeX, tread, heel + share * FL], half * FB);
+    between(
+      [kneeX, sole + height * MH - drop(share), heel + share * FL],
+      [kneeX, tread, heel + share * FL],
+      half * FB,
+    );
   return {
     rings: [
       thigh(first, 0.5 / 0.455),
@@ -93,7 +102,7 @@ function restLeg(f: Figure, shoeMm: number): { rings: Vec3[][]; toe: Vec3 } {
       foot(0.74, 0.54, 0.5),
       foot(0.93, 0.36, 0.37),
     ],
-    toe: [kneeX, sole + 0.14 * MH - shoeMm / 2, heel + 1.005 * FL],
+    toe: [kneeX, sole + 0.14 * MH - drop(1) - forefootMm / 2, heel + 1.005 * FL],
   };
 }
 
@@ -124,7 +133,7 @@ const FOOT_SHARE = [0.3, 0.5, 0.75, 1, 1, 1];
  * @param points - x, y, z of every cage point, millimetres, body frame
  */
 export function writeLegs(f: Figure, stance: Stance, cage: Cage, points: Float64Array): void {
-  const { rings, toe } = restLeg(f, stance.shoeMm);
+  const { rings, toe } = restLeg(f, stance);
   const hipAxis: Vec3 = [0, HIP_HEIGHT_MM, HIP_FORWARD_MM];
   const kneeRest = restKnee(f);
   const ankleRest = restAnkle(f);

@@ -6,7 +6,18 @@ import type { Figure, FigureMeans } from './figure.ts';
 import { readFigure } from './figure.ts';
 import { bodyJoints, type MannequinJoints } from './joints.ts';
 import { bodySegments, type MannequinSegment } from './segments.ts';
-import { HIP_FORWARD_MM, HIP_HEIGHT_MM, restAnkle, restKnee, type Stance } from './stance.ts';
+import {
+  bendPoint,
+  chestRad,
+  HIP_FORWARD_MM,
+  HIP_HEIGHT_MM,
+  restAnkle,
+  restKnee,
+  shoulderLineMm,
+  waistPivot,
+  type Stance,
+  type TrunkBend,
+} from './stance.ts';
 import { clamp, mix, turnAboutX } from './vector.ts';
 
 /** Where a place stands, as the mannequin needs it; a `PlaceFrame` is one. */
@@ -55,6 +66,35 @@ const LEAN_FURTHEST_RAD = (20 * Math.PI) / 180;
 const TOES_DOWN_RAD = (18 * Math.PI) / 180;
 /** Room left behind the knee before the sitter slides forward. */
 const BEHIND_KNEE_MM = 50;
+
+/** Everyday flat sole; a higher heel is taken to stand on a sole of this thickness. */
+const FLAT_SOLE_MM = 25;
+const SLUMP_FURTHEST_RAD = 0.6;
+
+/** Height of the base of the skull, and so of the eye but for a constant, with the head held at an angle. */
+function skullLevel(f: Figure, bend: TrunkBend, headRad: number): number {
+  const zS = shoulderLineMm(f);
+  const neck = bendPoint(f, bend, [0, f.AH + 20, zS - 14]);
+  const base = bendPoint(f, bend, [0, f.EH - 0.35 * (f.SH - f.EH), zS]);
+  return turnAboutX(base, neck, 0.4 * (headRad - chestRad(bend)))[1];
+}
+
+/** The bend that lowers the eye by so much. */
+function slumpFor(f: Figure, trunkRad: number, headRad: number, slumpMm: number): number {
+  if (!(slumpMm > 0)) return 0;
+  const upright = skullLevel(f, { trunkRad, slumpRad: 0 }, headRad);
+  let [low, high] = [0, SLUMP_FURTHEST_RAD];
+  for (let i = 0; i < 24; i++) {
+    const middle = (low + high) / 2;
+    if (upright - skullLevel(f, { trunkRad, slumpRad: middle }, headRad) < slumpMm) low = middle;
+    else high = middle;
+  }
+  return (low + high) / 2;
+}
+
+/** How far the pelvis moves forward so that a slumped back still rests where the upright one did. */
+const pelvisForward = (f: Figure, slumpRad: number): number =>
+  Math.sin(slumpRad) * (waistPivot(f)[1] - HIP_HEIGHT_MM);
 
 interface Legs {
   thighRad: number;
@@ -108,9 +148,13 @@ function legsFor(f: Figure, placement: BodyPlacement, shoeMm: number): Legs {
  * @param input.frame - the place: hip point on the unpressed seat, facing
  * @param input.situation - depth, tilt, lean and table of the place
  * @param input.sinkMm - how far the seat goes down under this sitter, mm
+ * @param input.forefootMm - sole under the ball of the foot, mm; the heel's height when that is less, 25 otherwise
+ * @param input.slumpMm - how much lower the eye is than upright, mm; 0 when absent. The pelvis moves forward, belt and
+ * chest bend against each other
  * @returns the pose; throws a RangeError naming the measure when one is missing
  * @source hip centre 92 mm over the seat and 135 mm before the buttock: SAE J826 device figures and
- * survey links; behind-knee gap 50 mm: common practice
+ * survey links; behind-knee gap 50 mm: common practice; everyday shoes 25 to 45 mm and a slump of up to 40 mm: City
+ * University of Hong Kong, Online Anthropometry, chapters 1 and 4; the shape of the slump by eye
  */
 export function poseMannequin(input: {
   means: Record<MeasureKey, number> | FigureMeans;
@@ -118,16 +162,21 @@ export function poseMannequin(input: {
   frame: SeatPoint;
   situation: SeatPosture;
   sinkMm: number;
+  forefootMm?: number;
+  slumpMm?: number;
 }): MannequinPose {
   const { means, shoeMm, frame, situation, sinkMm } = input;
   const f = readFigure(means);
   const notes: PoseNote[] = [];
   const slideMm = Math.max(0, situation.effectiveDepthMm - (f.BPL - BEHIND_KNEE_MM));
   if (slideMm > 0) notes.push({ kind: 'slides-forward', valueMm: slideMm });
-  const placement = bodyPlacement(frame, situation.seatTiltRad, sinkMm, slideMm);
-  const upright = placement.tiltRad;
+  const upright = situation.seatTiltRad;
   const lean = situation.backTopMm === undefined ? 0 : clamp(situation.backLeanRad, 0, LEAN_FURTHEST_RAD);
   const trunkRad = upright - lean;
+  const headRad = mix(trunkRad, upright, 0.9);
+  const slumpRad = slumpFor(f, trunkRad, headRad, input.slumpMm ?? 0);
+  const bend = { trunkRad, slumpRad };
+  const placement = bodyPlacement(frame, upright, sinkMm, slideMm + pelvisForward(f, slumpRad));
 
   const legs = legsFor(f, placement, shoeMm);
   if (legs.heelGapMm > 0.5) notes.push({ kind: 'feet-hang', valueMm: legs.heelGapMm });
@@ -136,19 +185,21 @@ export function poseMannequin(input: {
   const up: Vec3 = [0, Math.cos(upright), Math.sin(upright)];
   const edge =
     situation.table && toBody(placement, tableEdge(frame, situation.table, situation.effectiveDepthMm));
-  const onTable = edge && armOnTable(f, trunkRad, { topMm: edge[1], edgeMm: edge[2] }, up);
+  const onTable = edge && armOnTable(f, bend, { topMm: edge[1], edgeMm: edge[2] }, up);
   notes.push({ kind: onTable ? 'forearms-on-table' : 'hands-on-lap' });
-  const arm = onTable ?? armOnLap(f, trunkRad);
+  const arm = onTable ?? armOnLap(f, bend);
 
   const stance: Stance = {
     trunkRad,
-    headRad: mix(trunkRad, upright, 0.9),
+    slumpRad,
+    headRad,
     thighRad: legs.thighRad,
     shinRad: legs.shinRad,
     footRad: legs.footRad,
     toesOutRad: 0.12,
     arms: [arm, arm],
     shoeMm,
+    forefootMm: Math.min(input.forefootMm ?? FLAT_SOLE_MM, shoeMm),
   };
   const joints = bodyJoints(f, stance, placement);
   return {
@@ -156,7 +207,7 @@ export function poseMannequin(input: {
     stance,
     placement,
     joints,
-    segments: bodySegments(f, joints, placement),
+    segments: bodySegments(f, stance, placement),
     notes,
     headTopMm: joints.crown[1],
     eyeMm: joints.eye[1],

@@ -1,8 +1,26 @@
 import type { Vec3 } from '../parts/part.ts';
-import type { BodyPlacement } from './body-placement.ts';
+import { toRoom, type BodyPlacement } from './body-placement.ts';
 import type { Figure } from './figure.ts';
-import type { MannequinJoints } from './joints.ts';
-import { mixPoints } from './vector.ts';
+import { legLine, thighRings } from './leg-sections.ts';
+import {
+  armLinks,
+  bendPoint,
+  bicepsTuck,
+  chestRad,
+  direction,
+  HIP_FORWARD_MM,
+  HIP_HEIGHT_MM,
+  mirror,
+  restAnkle,
+  restElbow,
+  restKnee,
+  restShoulder,
+  shoulderLineMm,
+  type ArmStance,
+  type Stance,
+} from './stance.ts';
+import { chestFront, chestHalf, chestHeight, trunkLevels } from './trunk-profile.ts';
+import { add, along, clamp, cross, mix, sub, turnAboutX, turnAboutY, unit } from './vector.ts';
 
 /** What a stretch of the body wears. */
 export type MannequinTag = 'head' | 'hand' | 'shoe' | 'suit';
@@ -26,71 +44,152 @@ export type MannequinSegment =
       /** Half axes across the sitter, upwards and forwards. */
       radiiMm: Vec3;
       facingRad: number;
+      /** Turn about the sitter's left-hand axis; positive leans forward. */
+      leanRad: number;
     };
 
-/** Simple solids of a body from its joints. */
-export function bodySegments(
-  f: Figure,
-  joints: MannequinJoints,
-  placement: BodyPlacement,
-): MannequinSegment[] {
-  const { radius } = f;
-  const cone = (
+/** A ball of the body: centre in the body frame, radius. */
+type Ball = readonly [centre: Vec3, radius: number];
+type Stretch = readonly [tag: MannequinTag, name: string, from: Ball, to: Ball];
+
+const hipAxis: Vec3 = [0, HIP_HEIGHT_MM, HIP_FORWARD_MM];
+const ZERO: Vec3 = [0, 0, 0];
+
+/** Solids of the left leg: top of the thigh, knee, calf and foot lie where the skin has them. */
+function legStretches(f: Figure, stance: Stance): Stretch[] {
+  const { knee, ankle } = legLine(f, stance);
+  const kneeRest = restKnee(f);
+  const [first] = thighRings(f);
+  const onThigh = (p: Vec3): Vec3 => turnAboutX(p, hipAxis, stance.thighRad);
+  const onShin = (p: Vec3): Vec3 => turnAboutX(add(knee, sub(p, kneeRest)), knee, stance.shinRad);
+  const onFoot = (p: Vec3): Vec3 =>
+    add(
+      ankle,
+      turnAboutY(
+        turnAboutX([p[0], p[1], p[2] - FOOT_BACK_MM], ZERO, stance.footRad),
+        ZERO,
+        stance.toesOutRad,
+      ),
+    );
+  const cap = 0.42 * (f.KH - f.PH);
+  const calf = (f.BKL - f.BPL - 7) / 2;
+  const heel = 0.34 * f.FB;
+  const toe = 0.22 * f.FB;
+  const sole = -f.MH - stance.shoeMm;
+  const thigh: Ball = [onThigh([first.centreX, f.TC / 2, first.z]), f.TC / 2];
+  const heelBall: Ball = [onFoot([0, sole + heel, heel - 0.255 * f.FL]), heel];
+  const toeBall = (out: number): Ball => [
+    onFoot([out * (f.FB / 2 - toe), sole + toe, 0.745 * f.FL - toe]),
+    toe,
+  ];
+  return [
+    ['suit', 'thigh root', [onThigh([first.centreX, f.TC / 2, HIP_FORWARD_MM]), f.TC / 2], thigh],
+    ['suit', 'thigh', thigh, [onThigh([kneeRest[0], f.KH - f.PH - cap, f.BKL - cap]), cap]],
+    [
+      'suit',
+      'shin',
+      [onShin([kneeRest[0], -30, f.BPL + calf]), calf],
+      [onShin(restAnkle(f)), f.radius.ankle],
+    ],
+    ['shoe', 'foot', heelBall, toeBall(1)],
+    ['shoe', 'foot inside', heelBall, toeBall(-1)],
+  ];
+}
+
+/** Solids of a left arm: shoulder, elbow and fingertips lie where the skin has them. */
+function armStretches(f: Figure, arm: ArmStance): Stretch[] {
+  const u = direction(arm.shoulder, arm.elbow);
+  const lateral = unit(cross(direction(arm.elbow, arm.wrist), u), [1, 0, 0]);
+  const { radius, Ha } = f;
+  const flush = bicepsTuck(f) + 0.11 * (f.FF - f.BD);
+  const middle = along(along(arm.shoulder, u, 0.52 * armLinks(f).upperMm), lateral, -flush);
+  const biceps: Ball = [middle, 0.96 * radius.arm];
+  // The tip of the elbow lies a little beyond its centre.
+  const elbow: Ball = [along(arm.elbow, u, restElbow(f)[1] - f.ER - radius.elbow), radius.elbow];
+  return [
+    ['suit', 'shoulder', [arm.shoulder, f.BD / 2 - restShoulder(f)[0]], biceps],
+    ['suit', 'upper arm', biceps, elbow],
+    ['suit', 'forearm', elbow, [arm.wrist, radius.wrist]],
+    ['hand', 'hand', [arm.wrist, 0.14 * Ha], [along(arm.wrist, arm.hand, 0.93 * Ha), 0.07 * Ha]],
+  ];
+}
+
+/**
+ * Simple solids along a body, for distances and quick drawings. Where a check measures (top of the thigh, knee, back of
+ * the knee, elbow, shoulders, belly, buttock, head, foot) they reach as far as the near mesh, within 3 mm.
+ *
+ * @param f - the figure as wanted
+ * @param stance - its bends
+ * @param placement - where it is
+ * @returns solids in the room frame, millimetres
+ */
+export function bodySegments(f: Figure, stance: Stance, placement: BodyPlacement): MannequinSegment[] {
+  const out = (p: Vec3): Vec3 => toRoom(placement, p);
+  const solid = ([tag, name, from, to]: Stretch, side?: 'left' | 'right'): MannequinSegment => {
+    const flip = (p: Vec3): Vec3 => out(side === 'right' ? mirror(p) : p);
+    return {
+      kind: 'rounded-cone',
+      tag,
+      name: side ? `${side} ${name}` : name,
+      fromMm: flip(from[0]),
+      toMm: flip(to[0]),
+      fromRadiusMm: from[1],
+      toRadiusMm: to[1],
+    };
+  };
+  const limbs = (['left', 'right'] as const).flatMap((side, i) =>
+    [...legStretches(f, stance), ...armStretches(f, stance.arms[i]!)].map((each) => solid(each, side)),
+  );
+  const chest = chestRad(stance);
+  const blob = (
     tag: MannequinTag,
     name: string,
-    fromMm: Vec3,
-    toMm: Vec3,
-    fromRadiusMm: number,
-    toRadiusMm: number,
-  ): MannequinSegment => ({ kind: 'rounded-cone', tag, name, fromMm, toMm, fromRadiusMm, toRadiusMm });
-  const limbs = (['left', 'right'] as const).flatMap((side) => [
-    cone('suit', `${side} thigh`, joints[`${side}Hip`], joints[`${side}Knee`], f.TC / 2, radius.knee),
-    cone('suit', `${side} shin`, joints[`${side}Knee`], joints[`${side}Ankle`], radius.knee, radius.ankle),
-    cone('shoe', `${side} foot`, joints[`${side}Ankle`], joints[`${side}Toe`], f.FB / 2, 0.14 * f.FL),
-    cone(
-      'suit',
-      `${side} upper arm`,
-      joints[`${side}Shoulder`],
-      joints[`${side}Elbow`],
-      radius.arm,
-      radius.elbow,
-    ),
-    cone(
-      'suit',
-      `${side} forearm`,
-      joints[`${side}Elbow`],
-      joints[`${side}Wrist`],
-      radius.forearm,
-      radius.wrist,
-    ),
-    cone('hand', `${side} hand`, joints[`${side}Wrist`], joints[`${side}Fingertip`], 0.2 * f.Ha, 0.12 * f.Ha),
-  ]);
-  const trunkMiddle = mixPoints(joints.pelvis, joints.neck, 0.45);
+    centre: Vec3,
+    radiiMm: Vec3,
+    bodyLean: number,
+  ): MannequinSegment => ({
+    kind: 'ellipsoid',
+    tag,
+    name,
+    centreMm: out(centre),
+    radiiMm,
+    facingRad: placement.facingRad,
+    leanRad: bodyLean - placement.tiltRad,
+  });
+  const zS = shoulderLineMm(f);
+  const belly = trunkLevels(f)[2]!;
+  const hollow = beltHollow(f);
+  const front = f.AD + hollow;
+  const skull = 0.99 * (f.SH - f.EH);
+  const giveBack = stance.headRad - chest;
+  const neckBase = bendPoint(f, stance, [0, f.AH + 20, zS - 14]);
+  const head = turnAboutX(bendPoint(f, stance, [0, f.SH - skull, zS + 6 + 0.04 * f.HL]), neckBase, giveBack);
+  const yoke: Vec3 = bendPoint(f, stance, [f.BA / 2 - YOKE_MM, f.AH - YOKE_MM, zS]);
   return [
-    {
-      kind: 'ellipsoid',
-      tag: 'suit',
-      name: 'trunk',
-      centreMm: trunkMiddle,
-      radiiMm: [f.HB / 2, 0.56 * (f.AH - 40), f.AD / 2],
-      facingRad: placement.facingRad,
-    },
-    cone(
-      'head',
-      'neck',
-      joints.neck,
-      mixPoints(joints.neck, joints.crown, 0.4),
-      radius.neck,
-      radius.neck * 0.93,
+    blob('suit', 'pelvis', [0, 92, 128], [f.HB / 2, 92, 128], 0),
+    blob(
+      'suit',
+      'belly',
+      bendPoint(f, stance, [0, belly.y, (front + hollow) / 2], 0.55, 0.15),
+      [belly.halfWidth, 0.5 * (chestHeight(f) - 60), f.AD / 2],
+      chest / 2,
     ),
-    {
-      kind: 'ellipsoid',
-      tag: 'head',
-      name: 'head',
-      centreMm: mixPoints(joints.neck, joints.crown, 0.66),
-      radiiMm: [f.HBr / 2, (f.SH - f.EH) * 1.02, f.HL / 2],
-      facingRad: placement.facingRad,
-    },
+    blob(
+      'suit',
+      'chest',
+      bendPoint(f, stance, [0, mix(belly.y, f.AH, 0.62), 12 + f.CD / 2]),
+      [chestHalf(f), 0.38 * (f.AH - f.TC), (chestFront(f) - 12) / 2],
+      chest,
+    ),
+    solid(['suit', 'shoulders', [yoke, YOKE_MM], [mirror(yoke), YOKE_MM]]),
+    solid(['head', 'neck', [neckBase, f.radius.neck], [head, 0.93 * f.radius.neck]]),
+    blob('head', 'head', head, [f.HBr / 2, skull, f.HL / 2], stance.headRad),
     ...limbs,
   ];
 }
+
+/** How far the back of the belt stands before the rearmost buttock: less on a thin body. */
+const beltHollow = (f: Figure): number => mix(26.5, 22.5, clamp((23 - f.bodyMassIndex) / 5, 0, 1));
+const YOKE_MM = 45;
+/** The solved skin has its feet this much further back than the joints, give or take 2. */
+const FOOT_BACK_MM = 1.5;

@@ -22,13 +22,18 @@ export interface ArmStance {
  */
 export interface Stance {
   trunkRad: number;
+  /** How far belt and chest bend against each other: the belt that much backwards, the chest forwards; 0 upright. */
+  slumpRad: number;
   headRad: number;
   thighRad: number;
   shinRad: number;
   footRad: number;
   toesOutRad: number;
   arms: readonly [left: ArmStance, right: ArmStance];
+  /** Height of the shoe under the heel. */
   shoeMm: number;
+  /** Thickness of the sole under the ball of the foot; at most the heel. */
+  forefootMm: number;
 }
 
 /** Point the trunk leans about: the hip axis over the seat and before the back. */
@@ -38,6 +43,40 @@ export const HIP_FORWARD_MM = 135;
 /** Turns a point of the trunk with its lean. */
 export const leanPoint = (p: Vec3, angleRad: number): Vec3 =>
   turnAboutX(p, [0, HIP_HEIGHT_MM, HIP_FORWARD_MM], angleRad);
+
+/** The part of a stance that bends the trunk. */
+export type TrunkBend = Pick<Stance, 'trunkRad' | 'slumpRad'>;
+
+/** How far the chest is turned from upright. */
+export const chestRad = (bend: TrunkBend): number => bend.trunkRad + bend.slumpRad;
+
+/** Middle of the waist, where a slumped trunk bends. */
+export const waistPivot = (f: Figure): Vec3 => [0, mix(f.TC, 0.75 * f.AH, 0.5), 0.5 * f.AD];
+
+/**
+ * Bends a point of the upright trunk.
+ *
+ * @param belt - share of the lean a point takes, 0 at the seat to 1
+ * @param chest - share of the bend at the waist, 0 below it to 1 from the chest up
+ */
+export function bendPoint(f: Figure, bend: TrunkBend, p: Vec3, belt = 1, chest = 1): Vec3 {
+  const leaned = leanPoint(p, (bend.trunkRad - bend.slumpRad) * belt);
+  if (bend.slumpRad === 0 || chest === 0) return leaned;
+  return turnAboutX(
+    leaned,
+    leanPoint(waistPivot(f), bend.trunkRad - bend.slumpRad),
+    2 * bend.slumpRad * chest,
+  );
+}
+
+/** The point of the upright trunk that a bend carries to `p`; under a bent waist roughly. */
+export function unbendPoint(f: Figure, bend: TrunkBend, p: Vec3): Vec3 {
+  if (bend.slumpRad === 0) return leanPoint(p, -bend.trunkRad);
+  const belt = bend.trunkRad - bend.slumpRad;
+  const waist = leanPoint(waistPivot(f), belt);
+  if (p[1] < waist[1]) return leanPoint(p, -0.5 * belt);
+  return leanPoint(turnAboutX(p, waist, -2 * bend.slumpRad), -belt);
+}
 
 /** Depth of the shoulder line before the rearmost buttock. */
 export const shoulderLineMm = (f: Figure): number => 0.42 * f.CD - 4;
@@ -86,6 +125,7 @@ export function measuringStance(f: Figure): Stance {
   const arm: ArmStance = { shoulder, elbow, wrist, hand: [0, 0, 1], handBack: [0, 1, 0] };
   return {
     trunkRad: 0,
+    slumpRad: 0,
     headRad: 0,
     thighRad: 0,
     shinRad: 0,
@@ -93,6 +133,7 @@ export function measuringStance(f: Figure): Stance {
     toesOutRad: 0,
     arms: [arm, arm],
     shoeMm: 0,
+    forefootMm: 0,
   };
 }
 

@@ -53,7 +53,8 @@ export function gridsOf(level: Level, faceCount: number, size: number): Uint32Ar
 
 /** Triangles of one base face, looking outwards. */
 export function faceTriangles(face: CageFace, grid: Uint32Array, size: number, flip: boolean): number[] {
-  const rows = STRAIGHT[face.part].includes(face.strip) ? [0, 2, 4] : [0, 1, 2, 3, 4];
+  const step = size === 4 && STRAIGHT[face.part].includes(face.strip) ? 2 : 1;
+  const rows = Array.from({ length: size / step + 1 }, (_, i) => i * step);
   const out: number[] = [];
   for (let i = 0; i + 1 < rows.length; i++) {
     for (let u = 0; u < size; u++) {

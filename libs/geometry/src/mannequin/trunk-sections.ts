@@ -1,7 +1,7 @@
 import type { Vec3 } from '../parts/part.ts';
 import { TRUNK_COLUMNS, type Cage } from './cage.ts';
 import type { Figure } from './figure.ts';
-import { HIP_FORWARD_MM, HIP_HEIGHT_MM, leanPoint, shoulderLineMm, type Stance } from './stance.ts';
+import { HIP_FORWARD_MM, HIP_HEIGHT_MM, shoulderLineMm, bendPoint, chestRad, type Stance } from './stance.ts';
 import { clamp, mix, turnAboutX } from './vector.ts';
 
 /** A level ring: heights and depths at front, side and back, and half its width. */
@@ -158,6 +158,7 @@ function uprightHalf(f: Figure): { rings: Vec3[][]; crown: [Vec3, Vec3, Vec3] } 
 }
 
 const LEAN_SHARE = [0, 0.25, 0.55, 0.8];
+const SLUMP_SHARE = [0, 0, 0.15, 0.45, 0.8];
 const THIGH_SHARE = 0.25;
 
 /**
@@ -171,11 +172,10 @@ const THIGH_SHARE = 0.25;
 export function writeTrunk(f: Figure, stance: Stance, cage: Cage, points: Float64Array): void {
   const { rings, crown } = uprightHalf(f);
   const zS = shoulderLineMm(f);
-  const lean = stance.trunkRad;
-  const giveBack = stance.headRad - lean;
-  const neckBase = leanPoint([0, f.AH + 20, zS - 14], lean);
+  const giveBack = stance.headRad - chestRad(stance);
+  const neckBase = bendPoint(f, stance, [0, f.AH + 20, zS - 14]);
   const skullBase = turnAboutX(
-    leanPoint([0, f.EH - 0.35 * (f.SH - f.EH), zS], lean),
+    bendPoint(f, stance, [0, f.EH - 0.35 * (f.SH - f.EH), zS]),
     neckBase,
     0.4 * giveBack,
   );
@@ -183,7 +183,7 @@ export function writeTrunk(f: Figure, stance: Stance, cage: Cage, points: Float6
   const place = (ring: number, column: number, p: Vec3): Vec3 => {
     if (ring === 0)
       return column >= 1 && column <= 3 ? turnAboutX(p, hipAxis, stance.thighRad * THIGH_SHARE) : p;
-    const leaned = leanPoint(p, lean * (LEAN_SHARE[ring] ?? 1));
+    const leaned = bendPoint(f, stance, p, LEAN_SHARE[ring], SLUMP_SHARE[ring]);
     const share = ring < 8 ? 0 : ring === 8 ? 0.12 : ring === 9 ? 0.6 : 1;
     if (share === 0) return leaned;
     const nodded = turnAboutX(leaned, neckBase, 0.4 * giveBack * share);
