@@ -63,6 +63,58 @@ describe('the sheet', () => {
     expect(row(true)?.worst).toBe('notKnown');
   });
 
+  it('knows no pair, corner or bench with a place that nobody is behind, and hides no other pair', () => {
+    const anybody: KnownPerson = { bodyData: 'mixed', measured: {}, shoeMm: 25, clothing: 'light' };
+    const placeIds = ['b1:1', 'b1:2', 'b2:1', 'b2:2'];
+    const corner = (placeId: string) => ({
+      pieceIds: ['b1', 'b2'] as [string, string],
+      marks: ['B1', 'B2'] as [string, string],
+      placeId,
+      centreFromFrontMm: 900,
+      widthMm: 610,
+      // Deep seats, before which just anybody's knees do not stand out.
+      effectiveDepthMm: 800,
+    });
+    const room = (gapMm: number) =>
+      set({
+        places: placeIds.map((placeId) => place({ placeId, pieceId: placeId.slice(0, 2) })),
+        benches: [bench({ lengthMm: 3000, placeIds: ['b1:1', 'b1:2'] })],
+        corners: [corner('b1:1'), corner('b2:1')],
+        facing: [
+          {
+            pieceIds: ['b1', 'b2'],
+            marks: ['B1', 'B2'],
+            gapMm,
+            pairs: [
+              ['b1:1', 'b2:1'],
+              ['b1:2', 'b2:2'],
+            ],
+          },
+        ],
+      });
+    const words = (ruleId: string, noBody: boolean, gapMm = 1500) =>
+      check(
+        room(gapMm),
+        placeIds.map((id) => ({
+          ...sitter({ ...anybody }, id),
+          ...(noBody && id === 'b1:1' ? { noBody: true as const } : {}),
+        })),
+        { appleBoxes: { full: 4, half: 4, quarter: 4, pancake: 4 } },
+      ).piecesAndWays.flatMap((cell) =>
+        cell.ruleId === ruleId && cell.outcome.kind === 'verdict' ? [cell.outcome.verdict] : [],
+      );
+    for (const [ruleId, known, withNobody] of [
+      ['SIDE-01', ['fits'], ['notKnown']],
+      ['SIDE-04', ['fits'], ['fits', 'notKnown']],
+      ['SIDE-05', ['fits', 'fits'], ['fits', 'notKnown']],
+    ] as const) {
+      expect([ruleId, words(ruleId, false)]).toEqual([ruleId, known]);
+      expect([ruleId, words(ruleId, true)]).toEqual([ruleId, withNobody]);
+    }
+    expect(words('HEAD-04', true)[0]).toBe('notKnown');
+    expect(words('SIDE-04', true, 100)).toEqual(['wontFit', 'notKnown']);
+  });
+
   it('gives every row and the public row the same columns', () => {
     const places = [furnished(), place({ placeId: 'b1:2', place: 2 })];
     const sheet = check(set({ places }), [sitter(person()), sitter(person(), 'b1:2', 'Bo')]);

@@ -1,3 +1,4 @@
+import type { Body } from '../people/body.ts';
 import { answered, cellPieces, WORST_FIRST, type Answered } from './answered.ts';
 import { confidenceOf, judgementOf, type CheckInput } from './check-input.ts';
 import type { FitCell, FitSheet, Outcome, Sitter, SitterRow, Verdict } from './fit-sheet.ts';
@@ -8,7 +9,7 @@ import { PIECE_CHECKS } from './piece-checks.ts';
 import { publicRowOf } from './public-row.ts';
 import type { Rule } from './rule-book.ts';
 import type { PlaceSituation } from './situation.ts';
-import { judge, type Judgement } from './verdict.ts';
+import { bodiesIn, judge, type Judgement } from './verdict.ts';
 
 /**
  * The fit sheet of a set: every sitter against every rule, the public, and the pieces and ways.
@@ -22,8 +23,12 @@ export function checkSet(input: CheckInput): FitSheet {
   const { situation, sitters, ruleBook, model } = input;
   const places = new Map(situation.places.map((place) => [place.placeId, place]));
   const seated = new Map<string, Seated>(
-    sitters.map(({ placeId, name, person }) => [placeId, { name, body: model.predict(person) }]),
+    sitters.map(({ placeId, name, person, noBody }) => [
+      placeId,
+      { name, body: model.predict(person), ...(noBody ? { noBody } : {}) },
+    ]),
   );
+  const bodiesOfNobody = new Set([...seated.values()].flatMap(({ noBody, body }) => (noBody ? [body] : [])));
   const rows = sitters.map((sitter) => rowOf(input, sitter, places.get(sitter.placeId)));
   const counts: Record<Verdict, number> = { fits: 0, tight: 0, wontFit: 0, notKnown: 0 };
   for (const { cells } of rows) {
@@ -36,7 +41,7 @@ export function checkSet(input: CheckInput): FitSheet {
       const rule = ruleBook.rule(id);
       const judgement = judgementOf(input, rule);
       const asked: PieceAsked = { ...input, rule, seated, places, tolerance: judgement.tolerance };
-      return ask(asked).map((answer) => pieceCell(rule, answer, judgement));
+      return ask(asked).map((answer) => pieceCell(rule, answer, judgement, bodiesOfNobody));
     }),
     emptyPlaceIds: situation.places.map(({ placeId }) => placeId).filter((id) => !seated.has(id)),
     counts,
@@ -98,6 +103,7 @@ function rowOf(
     place: place?.place ?? 0,
     cells,
     worst: WORST_FIRST.find((verdict) => found.has(verdict)) ?? 'notKnown',
+    ...(sitter.noBody ? { noBody: sitter.noBody } : {}),
   };
 }
 
@@ -105,15 +111,22 @@ function rowOf(
 const untold = (outcome: Outcome): Outcome =>
   outcome.kind === 'verdict' ? { ...outcome, verdict: 'notKnown', estimated: true, settleWith: [] } : outcome;
 
-function pieceCell(rule: Rule, answer: PieceAnswer, judgement: Judgement): FitCell {
+function pieceCell(
+  rule: Rule,
+  answer: PieceAnswer,
+  judgement: Judgement,
+  bodiesOfNobody: ReadonlySet<Body>,
+): FitCell {
   const { pieceIds, marks, part, said } = answer;
   const where = [pieceIds.join('+'), ...(part ? [part] : [])].filter(Boolean).join('|');
+  const judged = 'kind' in said ? said : judge(said, judgement);
+  const ofNobody = !('kind' in said) && bodiesIn(said).some((body) => bodiesOfNobody.has(body));
   return {
     id: `${rule.id}|${where || 'set'}`,
     ruleId: rule.id,
     scope: rule.scope,
     pieceIds,
     marks,
-    outcome: 'kind' in said ? said : judge(said, judgement),
+    outcome: ofNobody ? untold(judged) : judged,
   };
 }

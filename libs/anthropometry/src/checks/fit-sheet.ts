@@ -115,6 +115,8 @@ export interface SitterRow {
   place: number;
   cells: FitCell[];
   worst: Verdict;
+  /** As of the sitter: numbers beside the verdicts are of anybody. */
+  noBody?: true;
 }
 
 /** The row of the public: each rule read at the end of the population that it protects. */

@@ -43,11 +43,21 @@ export const kneesFacing: PieceCheck = {
         said,
       });
       if (pairs.length === 0) return [asPair({ kind: 'doesNotApply', reason: 'nobody sits opposite' })];
-      const questions = pairs.map((pair) => facingQuestion(asked, pair, gapMm));
-      return [asPair(questions.reduce((a, b) => (room(b) < room(a) ? b : a)))];
+      const ofNobody = pairs.filter((pair) => pair.some((id) => asked.seated.get(id)?.noBody));
+      const known = pairs.filter((pair) => !ofNobody.includes(pair));
+      const closest = (some: typeof pairs) =>
+        some.map((pair) => facingQuestion(asked, pair, gapMm)).reduce((a, b) => (room(b) < room(a) ? b : a));
+      // A pair that is not known neither hides the closest of the others nor hides behind it.
+      return [
+        ...(known.length > 0 ? [asPair(closest(known))] : []),
+        ...(ofNobody.length > 0 ? [asPair(closest(ofNobody), NOT_KNOWN_PAIRS)] : []),
+      ];
     });
   },
 };
+
+/** Tells the answer about places that nobody is behind from the one about the others. */
+const NOT_KNOWN_PAIRS = 'nobody';
 
 /** Room to the pass line, to find the pair of sitters that is closest. */
 const room = ({ value, pass }: Question): number => best(value) - best(pass.lower ?? fixed(0));
@@ -77,10 +87,11 @@ export const cornerPlace: PieceCheck = {
     return corners.map((corner) => {
       const { pieceIds, marks, widthMm, centreFromFrontMm, placeId } = corner;
       const half: Amount = fixed(widthMm / 2);
-      const knees = kneesOut(asked, neighbourOf(corner, corners)?.placeId ?? '', corner.effectiveDepthMm);
-      // Knees that end behind the seat front ask for nothing.
-      const pass: Entry[] =
-        best(knees[1]) > 0 ? [['half the place', half], knees] : [['half the place', half]];
+      const neighbour = neighbourOf(corner, corners)?.placeId ?? '';
+      const knees = kneesOut(asked, neighbour, corner.effectiveDepthMm);
+      // Knees that end behind the seat front ask for nothing; those of nobody may be anywhere.
+      const asks = best(knees[1]) > 0 || asked.seated.get(neighbour)?.noBody;
+      const pass: Entry[] = asks ? [['half the place', half], knees] : [['half the place', half]];
       return {
         pieceIds,
         marks,

@@ -30,6 +30,8 @@ export interface CheckSettings {
 export interface Seated {
   name: string;
   body: Body;
+  /** Nobody is behind the name any more: the body is anybody's. */
+  noBody?: true;
 }
 
 /** A rule put to the pieces and ways of a set. */

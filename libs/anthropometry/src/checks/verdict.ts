@@ -1,4 +1,5 @@
 import type { MeasureKey } from '../measures/measures.ts';
+import type { Body } from '../people/body.ts';
 import { best, collectPredicted, minus, type Amount, type PredictedMeasure } from './amount.ts';
 import type { LedgerLine, LimitLines, Verdict, VerdictOutcome } from './fit-sheet.ts';
 import { probabilityOfRoom, roomMoved, roomQuantile, roomWithin, type Band } from './room.ts';
@@ -160,11 +161,19 @@ function linesOf({ lower, upper }: Band): LimitLines {
   return lines;
 }
 
-function predictedIn({ value, pass, fail }: Question): PredictedMeasure[] {
+/** Value and lines that hang on a body. */
+const amountsIn = ({ value, pass, fail }: Question): Amount[] =>
+  [value, pass.lower, pass.upper, fail.lower, fail.upper].filter(
+    (amount) => amount !== undefined && amount.terms.length > 0,
+  ) as Amount[];
+
+/** Bodies that a question reads. */
+export const bodiesIn = (question: Question): Body[] =>
+  amountsIn(question).flatMap(({ terms }) => terms.map(({ body }) => body));
+
+function predictedIn(question: Question): PredictedMeasure[] {
   const found: PredictedMeasure[] = [];
-  for (const amount of [value, pass.lower, pass.upper, fail.lower, fail.upper]) {
-    if (amount && amount.terms.length > 0) collectPredicted(amount, found);
-  }
+  for (const amount of amountsIn(question)) collectPredicted(amount, found);
   return found;
 }
 

@@ -15,7 +15,7 @@ const height = dimensionOf(bay, 'seat-height');
 const values = [380, 420, 460];
 
 /** One woman at a place; the second value takes her place away. */
-const check = (document: SetDocument): FitSheet =>
+const check = (document: SetDocument, noBody = false): FitSheet =>
   checkSet({
     situation: measureSet(document, ruleBook),
     sitters: [
@@ -25,6 +25,7 @@ const check = (document: SetDocument): FitSheet =>
         kind: 'mannequin',
         placeId: 'b1:2',
         person: model.mannequin({ bodyData: 'women', measure: 'stature', percentile: 50 }),
+        ...(noBody ? { noBody: true } : {}),
       },
     ],
     ruleBook,
@@ -61,6 +62,14 @@ describe('a map of two numbers', () => {
     expect(there).toContain('served');
     expect(gone).toEqual(['lost', 'lost', 'lost']);
     expect(map.regions[0]?.rooms[1]?.every((room) => room < 0)).toBe(true);
+  });
+
+  it('knows no room where nobody is behind the name, and blames no check for it', () => {
+    const removed = (set: SetDocument) => check(set, true);
+    const [region] = run(castMap({ across: values, up: [0], documentAt, check: removed, shown })).regions;
+    expect(new Set(region?.states.flat())).toEqual(new Set(['notKnown']));
+    expect(region?.rooms.flat().every((room) => room < 0)).toBe(true);
+    expect(region).not.toHaveProperty('blockedBy');
   });
 
   it('leaves out whoever no moving check asks', () => {

@@ -91,13 +91,15 @@ export function* castMap({
   );
   const all = movingRules(answers.map((grid) => grid.flat()));
   const moving = shown ? new Set([...all].filter((ruleId) => shown.has(ruleId))) : all;
-  const regions = people.flatMap(({ sitterId, placeId, name }, n): MapRegion[] => {
+  const regions = people.flatMap(({ sitterId, placeId, name, noBody }, n): MapRegion[] => {
     const grid = answers[n] ?? [];
     const asked = askedOf(grid.flat(), moving);
     if (asked.size === 0) return [];
-    const rooms = grid.map((row) => row.map((said) => roomOf(said, asked)));
+    // Nobody's room is not known; numbers beside the verdicts are of anybody.
+    const rooms = grid.map((row) => row.map((said) => (noBody ? -FAR : roomOf(said, asked))));
     const states = grid.map((row) => row.map((said) => stateOf(said, asked)));
-    const blockedBy = rooms.flat().every((room) => room < 0) ? blockOf(grid.flat(), asked) : undefined;
+    const isBlocked = !noBody && rooms.flat().every((room) => room < 0);
+    const blockedBy = isBlocked ? blockOf(grid.flat(), asked) : undefined;
     return [{ sitterId, placeId, name, rooms, states, ...(blockedBy ? { blockedBy } : {}) }];
   });
   return { across: [...across], up: [...up], ruleIds: [...moving], regions, placesAt };

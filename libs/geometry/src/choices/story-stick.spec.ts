@@ -45,10 +45,10 @@ const sitters: Sitter[] = [MEASURED, TOLD].map((person, i) => ({
   person,
 }));
 
-const check = (document: SetDocument): FitSheet =>
+const check = (document: SetDocument, who = sitters): FitSheet =>
   checkSet({
     situation: measureSet(document, ruleBook),
-    sitters,
+    sitters: who,
     ruleBook,
     model,
     settings: { backPosture: 'dining', trafficBehind: 'none' },
@@ -87,6 +87,22 @@ const stickOf = (dimension: Dimension, ruleId?: string): StoryStick =>
       ...(ruleId === undefined ? {} : { ruleId }),
     }),
   );
+
+describe('a sitter whom nobody is behind', () => {
+  it('has a row that is not known anywhere, without stretches of just anybody', () => {
+    const removed = (document: SetDocument) =>
+      check(
+        document,
+        sitters.map((one, n) => (n === 0 ? { ...one, noBody: true as const } : one)),
+      );
+    const dimension = named(bay(), 'seat-height');
+    const values = stickValues(dimension, INCH);
+    const [first, other] = run(storyStick({ dimension, values, check: removed, ruleId: 'SEAT-02' })).rows;
+    expect(new Set(first?.states)).toEqual(new Set(['notKnown']));
+    expect(first).toMatchObject({ fits: [], tight: [], surelyTight: [], perhapsTight: [] });
+    expect(other?.tight).not.toEqual([]);
+  });
+});
 
 describe('dimensions of a set', () => {
   it('moves all benches together and keeps what sets them apart', () => {

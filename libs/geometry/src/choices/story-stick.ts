@@ -140,7 +140,9 @@ function stickRow(
         ? -Infinity
         : Math.min(...cells.map(({ outcome }) => (outcome.kind === 'verdict' ? room(outcome) : Infinity))),
     );
-  const { sitterId, placeId, name } = row;
+  const { sitterId, placeId, name, noBody } = row;
+  // Without a body there is no best value, and so no stretch.
+  const where = (room: (outcome: VerdictOutcome) => number) => (noBody ? [] : stretches(values, rooms(room)));
   return {
     sitterId,
     placeId,
@@ -148,19 +150,10 @@ function stickRow(
     estimated: along.some(({ cells }) =>
       cells.some(({ outcome }) => outcome.kind === 'verdict' && outcome.estimated),
     ),
-    fits: stretches(values, rooms(roomToPass)),
-    tight: stretches(
-      values,
-      rooms(({ margin }) => margin),
-    ),
-    surelyTight: stretches(
-      values,
-      rooms(({ margin, marginRange }) => marginRange?.low ?? margin),
-    ),
-    perhapsTight: stretches(
-      values,
-      rooms(({ margin, marginRange }) => marginRange?.high ?? margin),
-    ),
+    fits: where(roomToPass),
+    tight: where(({ margin }) => margin),
+    surelyTight: where(({ margin, marginRange }) => marginRange?.low ?? margin),
+    perhapsTight: where(({ margin, marginRange }) => marginRange?.high ?? margin),
     states: along.map(({ cells, gone }) => (gone > 0 ? 'gone' : worstState(cells))),
   };
 }
