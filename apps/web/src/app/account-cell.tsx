@@ -43,7 +43,7 @@ export function AccountCell() {
   ];
   const described = role === null ? user.name : `${user.name}, ${role}`;
   return (
-    <div className="flex min-w-0 max-tablet:shrink-0">
+    <div data-fixed className="flex min-w-0 border-l border-rule max-tablet:shrink-0">
       <Menu
         name={`Signed in: ${described}, menu`}
         button={

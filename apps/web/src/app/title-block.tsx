@@ -4,16 +4,18 @@ import { Wordmark } from '@/components/brand.tsx';
 import { classNames } from '@/components/class-names.ts';
 import { type TitleCell, useAllTitleCells } from '@/lib/title-cells.ts';
 import { AccountCell } from './account-cell.tsx';
-import { SavedCell } from './saved-cell.tsx';
+import { MoreCell } from './more-cell.tsx';
 import { CELL, CellFace, PRESSABLE } from './title-cell.tsx';
-import { UnitsCell } from './units-cell.tsx';
+import { useSavedTime } from './use-saved-time.ts';
+import { useTitleFit } from './use-title-fit.ts';
+import { useUnitsCell } from './use-units-cell.ts';
 
 function Cell({ cell }: { cell: TitleCell }) {
   const face = <CellFace label={cell.label} value={cell.value} quiet={cell.disabled} />;
   if (cell.menu) {
     return (
       <Menu
-        name={cell.name ?? `${cell.label}: ${typeof cell.value === 'string' ? cell.value : ''}, menu`}
+        name={cell.name ?? `${cell.label}: ${cell.value}, menu`}
         button={face}
         buttonClassName={classNames(CELL, PRESSABLE)}
         entries={cell.menu}
@@ -48,38 +50,44 @@ function Cell({ cell }: { cell: TitleCell }) {
   );
 }
 
-function Cells({ cells }: { cells: TitleCell[] }) {
-  return cells.map((cell) => (
-    <div key={cell.id} className={classNames('flex min-w-0', !cell.phone && 'max-tablet:hidden')}>
-      <Cell cell={cell} />
-    </div>
-  ));
+function Cells({ cells, moved }: { cells: readonly TitleCell[]; moved: readonly string[] }) {
+  return cells
+    .filter(({ id }) => !moved.includes(id))
+    .map((cell) => (
+      <div key={cell.id} data-cell={cell.id} className="flex border-l border-rule">
+        <Cell cell={cell} />
+      </div>
+    ));
 }
 
 /** The ruled strip across the top, as on a drawing; it takes the place of a menu bar. */
 export function TitleBlock({ home }: { home: string }) {
-  const cells = useAllTitleCells();
-  const left = cells.filter((cell) => cell.side === 'left');
-  const right = cells.filter((cell) => cell.side === 'right');
+  const units = useUnitsCell();
+  const saved = useSavedTime();
+  const set = useAllTitleCells();
+  const cells = [...set, units, ...(saved ? [saved] : [])];
+  const { header, moved } = useTitleFit(cells);
   return (
-    <header className="sticky top-0 z-30 flex h-14 border-b-[1.25px] border-ink bg-paper pl-8 max-tablet:h-[52px] max-tablet:pl-4 print:hidden">
+    <header
+      ref={header}
+      className="sticky top-0 z-30 flex h-14 border-b-[1.25px] border-ink bg-paper pr-3 pl-8 [--cell-pad:1.25rem] max-desk:[--cell-pad:1rem] max-tablet:h-[52px] max-tablet:pr-0 max-tablet:pl-4 max-tablet:[--cell-pad:0.75rem] max-phone:[--cell-pad:0.5rem] print:hidden"
+    >
       <Link
         to={home}
+        data-fixed
         aria-label="Settlewright, all productions"
         className="flex shrink-0 items-center pr-5 no-underline max-tablet:pr-3"
       >
         <Wordmark quiet />
       </Link>
-      <nav aria-label="Where you are" className="flex min-w-0 divide-x divide-rule border-x border-rule">
-        <Cells cells={left} />
+      {/* All cells give way to each other, whichever side they stand on. */}
+      <nav aria-label="Where you are" className="contents">
+        <Cells cells={cells.filter(({ side }) => side === 'left')} moved={moved} />
       </nav>
-      <div className="min-w-0 flex-1" />
-      <div className="flex min-w-0 divide-x divide-rule border-l border-rule pr-3 max-tablet:pr-0">
-        <Cells cells={right} />
-        <UnitsCell />
-        <SavedCell />
-        <AccountCell />
-      </div>
+      <div className="min-w-0 flex-1 border-l border-rule" />
+      <Cells cells={cells.filter(({ side }) => side === 'right')} moved={moved} />
+      <MoreCell cells={cells.filter(({ id }) => moved.includes(id))} />
+      <AccountCell />
     </header>
   );
 }

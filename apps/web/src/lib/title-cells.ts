@@ -1,4 +1,3 @@
-import type { ReactNode } from 'react';
 import { useEffect, useId, useLayoutEffect } from 'react';
 import { create } from 'zustand';
 
@@ -9,7 +8,7 @@ export interface TitleCell {
   side: 'left' | 'right';
   order: number;
   label: string;
-  value: ReactNode;
+  value: string;
   /** A link. */
   to?: string;
   /** A button, for example undo. */
@@ -19,8 +18,10 @@ export interface TitleCell {
   menu?: TitleMenuEntry[];
   /** Name for a screen reader where label and value do not say it. */
   name?: string;
-  /** Shown in the bar of a phone as well. */
-  phone?: boolean;
+  /** A name or a step: cut short with an ellipsis before any cell leaves. */
+  shortens?: boolean;
+  /** Where room is short the highest goes into the menu first; without it the cell always stands. */
+  yields?: number;
 }
 
 export interface TitleMenuEntry {

@@ -21,7 +21,8 @@ function ProductionFrame({ production, workshopId }: { production: Production; w
         label: production.status === 'archived' ? 'Production, archived' : 'Production',
         value: production.name,
         name: `Production: ${production.name}, menu`,
-        phone: setId === undefined,
+        shortens: true,
+        yields: setId === undefined ? undefined : 20,
         menu: [
           { id: 'page', words: 'Sets and orders', to: home },
           { id: 'people', words: 'People', to: `${home}/people` },

@@ -18,7 +18,8 @@ function WorkshopCell({ workshop }: { workshop: Membership }) {
         label: workshop.isDemo ? 'Workshop, demonstration' : 'Workshop',
         value: workshop.name,
         name: `Workshop: ${workshop.name}, menu`,
-        phone: productionId === undefined,
+        shortens: true,
+        yields: productionId === undefined ? undefined : 50,
         menu: [
           { id: 'productions', words: 'Productions', to: `/w/${workshop.id}` },
           { id: 'settings', words: 'Workshop and people', to: `/w/${workshop.id}/workshop` },

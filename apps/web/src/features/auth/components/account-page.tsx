@@ -209,7 +209,7 @@ function SessionsPart() {
 export function AccountPage() {
   usePageTitle('Your account');
   const cells = useMemo<TitleCell[]>(
-    () => [{ id: 'account', side: 'left', order: 10, label: 'Page', value: 'Your account', phone: true }],
+    () => [{ id: 'account', side: 'left', order: 10, label: 'Page', value: 'Your account', shortens: true }],
     [],
   );
   useTitleCells(cells);

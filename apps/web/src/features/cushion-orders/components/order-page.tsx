@@ -32,6 +32,7 @@ function Opened({ path, order }: { path: OrderPath; order: Order }) {
           order: 40,
           label: 'Revision',
           value: `${order.revisionLetter}, issued ${dayWords(order.revisionIssuedAt)}`,
+          yields: 30,
         },
       ],
       [order.number, order.revisionLetter, order.revisionIssuedAt],

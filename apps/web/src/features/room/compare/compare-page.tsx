@@ -27,7 +27,7 @@ export function ComparePage({ path }: { path: SetPath }) {
   usePageTitle(`Compare, ${setName}`);
   const home = `/w/${path.workshopId}/p/${path.productionId}/sets/${path.setId}`;
   const cells = useMemo<TitleCell[]>(
-    () => [{ id: 'set', side: 'left', order: 30, label: 'Set', value: setName, to: home, phone: true }],
+    () => [{ id: 'set', side: 'left', order: 30, label: 'Set', value: setName, to: home, shortens: true }],
     [setName, home],
   );
   useTitleCells(cells);

@@ -22,7 +22,7 @@ export function RevisionsPage({ path }: { path: SetPath }) {
   usePageTitle(`Revisions of ${name}`);
   const home = `/w/${path.workshopId}/p/${path.productionId}/sets/${path.setId}`;
   const cells = useMemo<TitleCell[]>(
-    () => [{ id: 'set', side: 'left', order: 30, label: 'Set', value: name, to: home, phone: true }],
+    () => [{ id: 'set', side: 'left', order: 30, label: 'Set', value: name, to: home, shortens: true }],
     [name, home],
   );
   useTitleCells(cells);

@@ -32,7 +32,7 @@ export function useRoomCells(lastRevision: Issued | null | undefined, canEdit: b
         order: 30,
         label: 'Set',
         value: setName,
-        phone: true,
+        shortens: true,
         menu: [
           { id: 'room', words: 'The room', to: home },
           { id: 'fit', words: 'Fit sheet', to: `${home}/fit` },
@@ -50,6 +50,7 @@ export function useRoomCells(lastRevision: Issued | null | undefined, canEdit: b
         label: 'Draft',
         value: sayDraft(number, lastRevision),
         to: `${home}/revisions`,
+        yields: 30,
       },
     ];
     if (!canEdit) return where;
@@ -64,7 +65,7 @@ export function useRoomCells(lastRevision: Issued | null | undefined, canEdit: b
         name: `Undo ${undo ?? 'nothing'}`,
         disabled: undo === undefined,
         onPress: undoStep,
-        phone: true,
+        shortens: true,
       },
       {
         id: 'redo',
@@ -75,6 +76,8 @@ export function useRoomCells(lastRevision: Issued | null | undefined, canEdit: b
         name: `Redo ${redo ?? 'nothing'}`,
         disabled: redo === undefined,
         onPress: redoStep,
+        shortens: true,
+        yields: 40,
       },
     ];
     // The two steps act on the store, whatever render made them.

@@ -1,15 +1,13 @@
 import { useEffect, useState } from 'react';
 import { useConnection } from '@/lib/connection.ts';
 import { type SavedState, useSavedState } from '@/lib/saved-state.ts';
-import { CELL, CellFace } from './title-cell.tsx';
+import type { TitleCell } from '@/lib/title-cells.ts';
 
 function ago(at: number, now: number): string {
   const minutes = Math.floor((now - at) / 60_000);
   if (minutes < 1) return 'just now';
-  if (minutes === 1) return 'a minute ago';
-  if (minutes < 60) return `${minutes} minutes ago`;
-  const hours = Math.floor(minutes / 60);
-  return hours === 1 ? 'an hour ago' : `${hours} hours ago`;
+  if (minutes < 60) return `${minutes} min ago`;
+  return `${Math.floor(minutes / 60)} h ago`;
 }
 
 function savedWords(saved: SavedState, now: number): string {
@@ -37,20 +35,18 @@ function useMinuteClock(): number {
 }
 
 /** When the page was last saved; absent on pages that save with a button. */
-export function SavedCell() {
+export function useSavedTime(): TitleCell | undefined {
   const saved = useSavedState((state) => state.saved);
   const reachable = useConnection((state) => state.reachable);
   const now = useMinuteClock();
-  if (saved.kind === 'nothing') return null;
+  if (saved.kind === 'nothing') return undefined;
   const shown: SavedState = !reachable && saved.kind === 'not-saved' ? { kind: 'kept-here' } : saved;
-  return (
-    <div className="flex min-w-0">
-      <div className={CELL}>
-        <CellFace
-          label="Saved"
-          value={savedWords(shown, Math.max(now, saved.kind === 'saved' ? saved.at : 0))}
-        />
-      </div>
-    </div>
-  );
+  return {
+    id: 'saved',
+    side: 'right',
+    order: 40,
+    label: 'Saved',
+    value: savedWords(shown, Math.max(now, saved.kind === 'saved' ? saved.at : 0)),
+    shortens: true,
+  };
 }
