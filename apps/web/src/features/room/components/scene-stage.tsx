@@ -74,7 +74,12 @@ export function SceneStage({ picture, piece, address, actions, several, onOpenCe
     [picture, tapedId],
   );
   const shown =
-    showTapes && !clientView ? tapesAtRest(tapes, picture.sheet, tapedId, lit, view.narrow ? 2 : 5) : [];
+    showTapes && !clientView
+      ? tapesAtRest(tapes, picture.sheet, tapedId, lit, view.narrow ? 2 : 5).filter(
+          // A gap under somebody who was cut away would hang on nothing.
+          ({ kind, fromMm }) => kind !== 'gap' || isBehind(fromMm, view.cut),
+        )
+      : [];
   const bodies = showBodies ? picture.bodies.filter((body) => isBehind(body.crownMm, view.cut)) : [];
 
   function keys(event: KeyboardEvent<HTMLDivElement>) {

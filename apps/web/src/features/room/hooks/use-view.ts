@@ -1,4 +1,5 @@
 import { useEffect, useLayoutEffect, useMemo, useRef, useState, type RefObject } from 'react';
+import { flushSync } from 'react-dom';
 import type { RoomPicture } from '../picture.ts';
 import { boundsToShow, cutThrough } from '../scene/focus.ts';
 import { createViewController, type ViewController } from '../scene/view-controller.ts';
@@ -46,8 +47,8 @@ export function useView(
   const piece = document.pieces.find((candidate) => candidate.id === selectedPieceId);
 
   const bounds = useMemo(
-    () => boundsToShow(document, parts, selectedPieceId, narrow),
-    [document, parts, selectedPieceId, narrow],
+    () => boundsToShow(picture, selectedPieceId, narrow),
+    [picture, selectedPieceId, narrow],
   );
   const cut = useMemo(
     () => (letter === 'C' ? cutThrough(piece ?? document.pieces[0], parts) : undefined),
@@ -57,9 +58,13 @@ export function useView(
   useLayoutEffect(() => {
     const element = sheet.current;
     if (!element) return undefined;
-    const measure = () => setSize({ width: element.clientWidth, height: element.clientHeight });
+    const measure = () => {
+      const { width, height } = element.getBoundingClientRect();
+      setSize((before) => (before.width === width && before.height === height ? before : { width, height }));
+    };
     measure();
-    const observer = new ResizeObserver(measure);
+    // Before the page is painted: a picture of the former size would be seen cut off.
+    const observer = new ResizeObserver(() => flushSync(measure));
     observer.observe(element);
     return () => observer.disconnect();
   }, [sheet]);

@@ -1,6 +1,6 @@
 import { describe, expect, it } from 'vitest';
 import type { ViewFrame } from '../scene/view-frame.ts';
-import { placeFlags, placeNames, tapePath } from './layout.ts';
+import { isEndOn, placeFlags, placeNames, tapePath } from './layout.ts';
 
 const frame: ViewFrame = {
   target: [0, 0, 0],
@@ -57,6 +57,28 @@ describe('tape flags', () => {
         expect(Math.abs(a.x - b.x) >= 80 || Math.abs(a.y - b.y) >= 24).toBe(true);
       }),
     );
+  });
+
+  it('find a place off the cross line of a short gap where that is full', () => {
+    // A long tape lies on either side of the gap, its flag at the height of the gap.
+    const beside = (id: string, x: number) => ({
+      ...flag(id),
+      fromMm: [x, -30, 0] as const,
+      toMm: [x, 30, 0] as const,
+    });
+    const crowd = [-180, -90, 90, 180, 270].map((x) => beside(`at ${x}`, x));
+    const gap = { ...flag('gap'), fromMm: [0, 0, 0] as const, toMm: [0, 40, 0] as const };
+    const placed = placeFlags(frame, viewport, [...crowd, gap], [], []);
+    const last = placed.at(-1);
+    placed.slice(0, -1).forEach((other) => {
+      expect(Math.abs(other.x - last!.x) >= 80 || Math.abs(other.y - last!.y) >= 24).toBe(true);
+    });
+  });
+
+  it('are not for a line that runs towards the eye', () => {
+    expect(isEndOn(frame, viewport, [0, 0, -500], [0, 0, 500])).toBe(true);
+    expect(isEndOn(frame, viewport, [0, 0, -500], [400, 0, 500])).toBe(false);
+    expect(isEndOn(frame, viewport, [0, 0, 0], [0, 3, 0])).toBe(false);
   });
 
   it('leave a head free', () => {

@@ -114,6 +114,18 @@ const meet = (a: Box, b: Box, gap = 4): boolean =>
 
 const ALONG = [0.5, 0.36, 0.64, 0.22, 0.78];
 const ASIDE = [26, -26, 48, -48, 72, -72, 100, -100, 136, -136];
+/** Off its own cross line as well, where that is full. */
+const SHIFTS = [0, 32, -32, 64, -64, 96, -96];
+/** A line this much shortened by the view is seen end on and says nothing. */
+const END_ON = 0.08;
+
+/** Whether a line of the room runs so nearly towards the eye that it cannot be read. */
+export function isEndOn(frame: ViewFrame, viewport: Viewport, fromMm: Vec3, toMm: Vec3): boolean {
+  const [from, to] = [project(frame, viewport, fromMm), project(frame, viewport, toMm)];
+  const pixels = viewport.height / (2 * frame.halfHeightMm);
+  const trueMm = Math.hypot(toMm[0] - fromMm[0], toMm[1] - fromMm[1], toMm[2] - fromMm[2]);
+  return Math.hypot(to.x - from.x, to.y - from.y) < END_ON * trueMm * pixels;
+}
 
 /**
  * Finds a place for each flag: on its line, then along it, then off it with a leader.
@@ -173,10 +185,13 @@ export function placeFlags(
           if (isFree(at.x, at.y, avoid)) return keep(at.x, at.y, false);
         }
       }
-      for (const aside of ASIDE) {
-        const reach = Math.sign(aside) * (Math.abs(across.x) * flag.width * 0.5) + aside;
-        const at = { x: middle.x + across.x * reach, y: middle.y + across.y * aside };
-        if (isFree(at.x, at.y, avoid)) return keep(at.x, at.y, true);
+      for (const shift of SHIFTS) {
+        for (const aside of ASIDE) {
+          const reach = Math.sign(aside) * (Math.abs(across.x) * flag.width * 0.5) + aside;
+          const x = middle.x + across.x * reach - across.y * shift;
+          const y = middle.y + across.y * aside + across.x * shift;
+          if (isFree(x, y, avoid)) return keep(x, y, true);
+        }
       }
     }
     const x = Math.min(Math.max(middle.x, EDGE + flag.width / 2), viewport.width - EDGE - flag.width / 2);

@@ -6,7 +6,7 @@ import type { SeatedBody } from '../picture.ts';
 import { useSurroundings } from '../room-context.tsx';
 import type { ViewController } from '../scene/view-controller.ts';
 import { mix } from '../scene/vectors.ts';
-import { placeFlags, placeNames, placeNamesAtHeads, tapePath, type Blob } from './layout.ts';
+import { isEndOn, placeFlags, placeNames, placeNamesAtHeads, tapePath, type Blob } from './layout.ts';
 import { TapeFlag } from './tape-flag.tsx';
 import { tapeTone } from './tape-words.ts';
 import { shortName } from '@/lib/short-name.ts';
@@ -78,10 +78,18 @@ export function Overlay(props: Props) {
           : `M${name.x.toFixed(1)} ${(name.y + 11).toFixed(1)}L${name.head.x.toFixed(1)} ${(name.head.y - 2).toFixed(1)}`,
       );
     }
+    const readable = tapes.filter((tape) => !isEndOn(frame, viewport, tape.fromMm, tape.toMm));
+    for (const tape of tapes) {
+      const hidden = !readable.includes(tape);
+      find<HTMLElement>('flag', tape.id)?.style.setProperty('visibility', hidden ? 'hidden' : 'visible');
+      if (!hidden) continue;
+      find<SVGPathElement>('tape', tape.id)?.setAttribute('d', '');
+      find<SVGPathElement>('tape-leader', tape.id)?.setAttribute('d', '');
+    }
     const placed = placeFlags(
       frame,
       viewport,
-      tapes.map((tape) => ({
+      readable.map((tape) => ({
         id: tape.id,
         fromMm: tape.fromMm,
         toMm: tape.toMm,

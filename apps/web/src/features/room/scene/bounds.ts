@@ -1,4 +1,4 @@
-import type { Part, Vec3 } from '@settlewright/geometry';
+import type { MannequinPose, Part, Vec3 } from '@settlewright/geometry';
 import { partAxes } from './vectors';
 
 export interface Bounds {
@@ -47,6 +47,21 @@ export function boundsOf(parts: readonly Part[]): Bounds | undefined {
     }
   }
   return { min, max };
+}
+
+/** Box around a body, clothes left out. */
+export function boundsOfBody({ segments }: MannequinPose): Bounds {
+  const spots = segments.flatMap((segment): { at: Vec3; reach: number }[] =>
+    segment.kind === 'ellipsoid'
+      ? [{ at: segment.centreMm, reach: Math.max(...segment.radiiMm) }]
+      : [
+          { at: segment.fromMm, reach: segment.fromRadiusMm },
+          { at: segment.toMm, reach: segment.toRadiusMm },
+        ],
+  );
+  const side = (axis: 0 | 1 | 2, sign: 1 | -1) =>
+    sign * Math.max(...spots.map(({ at, reach }) => sign * at[axis] + reach));
+  return { min: [side(0, -1), side(1, -1), side(2, -1)], max: [side(0, 1), side(1, 1), side(2, 1)] };
 }
 
 export function union(a: Bounds, b: Bounds): Bounds {

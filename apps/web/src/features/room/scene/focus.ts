@@ -1,5 +1,6 @@
-import type { Part, Piece, SetDocument, Vec3 } from '@settlewright/geometry';
-import { boundsOf, union, type Bounds } from './bounds.ts';
+import type { Piece, Part, Vec3 } from '@settlewright/geometry';
+import type { RoomPicture } from '../picture.ts';
+import { boundsOf, boundsOfBody, union, type Bounds } from './bounds.ts';
 import type { Cut } from './views.ts';
 
 const BAY_MM = 2600;
@@ -8,17 +9,25 @@ const EMPTY_ROOM: Bounds = { min: [-1800, 0, -900], max: [1800, 1500, 900] };
 const SURROUNDING = new Set<string>(['bulkhead', 'sill', 'overhead']);
 const HEAD_ROOM_MM = 1400;
 
-/** What a view has to show: the whole set, or on a narrow sheet the bay of the selected piece. */
+type Shown = Pick<RoomPicture, 'document' | 'parts'> & {
+  bodies: readonly Pick<RoomPicture['bodies'][number], 'pieceId' | 'pose'>[];
+};
+
+/**
+ * What a view has to show: the whole set with whoever sits in it, feet and all, or on a narrow sheet
+ * the bay of the selected piece.
+ */
 export function boundsToShow(
-  document: SetDocument,
-  parts: readonly Part[],
+  { document, parts, bodies }: Shown,
   selectedPieceId: string | undefined,
   narrow: boolean,
 ): Bounds {
   const kinds = new Map(document.pieces.map((piece) => [piece.id, piece.kind]));
   const furniture = parts.filter((part) => !SURROUNDING.has(kinds.get(part.pieceId) ?? ''));
   const shown = furniture.length > 0 ? furniture : parts;
-  const all = boundsOf(shown) ?? EMPTY_ROOM;
+  const seated = (pieces?: ReadonlySet<string>) =>
+    bodies.filter(({ pieceId }) => pieces?.has(pieceId) ?? true).map(({ pose }) => boundsOfBody(pose));
+  const all = seated().reduce(union, boundsOf(shown) ?? EMPTY_ROOM);
   const whole: Bounds = { min: all.min, max: [all.max[0], Math.max(all.max[1], HEAD_ROOM_MM), all.max[2]] };
   if (!narrow || whole.max[0] - whole.min[0] <= BAY_MM) return whole;
   const boxes = document.pieces.flatMap((piece) => {
@@ -28,12 +37,16 @@ export function boundsToShow(
   const start = boxes.find((entry) => entry.id === selectedPieceId) ?? boxes[0];
   if (!start) return whole;
   let bay = start.box;
-  for (const { box } of [...boxes].sort(
+  const inside = new Set<string>();
+  for (const { id, box } of [...boxes].sort(
     (a, b) => Math.abs(a.middle - start.middle) - Math.abs(b.middle - start.middle),
   )) {
     const wider = union(bay, box);
-    if (wider.max[0] - wider.min[0] <= BAY_MM) bay = wider;
+    if (wider.max[0] - wider.min[0] > BAY_MM) continue;
+    bay = wider;
+    inside.add(id);
   }
+  bay = seated(inside).reduce(union, bay);
   return {
     min: [bay.min[0], whole.min[1], bay.min[2]],
     max: [bay.max[0], Math.max(bay.max[1], HEAD_ROOM_MM), bay.max[2]],

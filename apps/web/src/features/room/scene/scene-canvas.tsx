@@ -1,8 +1,9 @@
 import { Canvas, useFrame, useThree } from '@react-three/fiber';
-import { useEffect, useMemo, useRef } from 'react';
+import { useEffect, useLayoutEffect, useMemo, useRef } from 'react';
 import { OrthographicCamera } from 'three';
 import type { RoomPicture } from '../picture';
 import { BodyFigures } from './body-figures';
+import { followView } from './follow-view';
 import { Ground } from './ground';
 import { PieceSolids } from './piece-solids';
 import { readPalette } from './palette';
@@ -60,7 +61,7 @@ function Stage({ picture, controller, letter, cut, chosenIds, showBodies, theme,
   const camera = useMemo(() => new OrthographicCamera(), []);
   const shared = useMemo(() => createSharedUniforms(), []);
   const materials = useMemo(() => createMaterials(shared), [shared]);
-  const { invalidate, size, gl } = useThree();
+  const { invalidate, get, gl } = useThree();
   const canvas = gl.domElement;
   // The theme is read from the tokens, which React does not see change.
   const palette = useMemo(() => ({ ...readPalette(canvas), theme }), [canvas, theme]);
@@ -84,12 +85,7 @@ function Stage({ picture, controller, letter, cut, chosenIds, showBodies, theme,
     invalidate();
   }, [cut, shared, invalidate]);
 
-  useEffect(() => {
-    shared.uSize.value.set(size.width, size.height);
-    invalidate();
-  }, [size, shared, invalidate]);
-
-  useEffect(() => controller.subscribe(() => invalidate()), [controller, invalidate]);
+  useLayoutEffect(() => followView(controller, get), [controller, get]);
   useEffect(() => invalidate(), [picture, letter, chosenIds, showBodies, invalidate]);
   useEffect(
     () => () => Object.values(materials).forEach((item) => 'dispose' in item && item.dispose()),
@@ -97,10 +93,11 @@ function Stage({ picture, controller, letter, cut, chosenIds, showBodies, theme,
   );
 
   const lastReport = useRef('');
-  useFrame(({ gl: renderer, scene }) => {
+  useFrame(({ gl: renderer, scene, size }) => {
     const frame = controller.frame();
     if (!frame) return;
     placeEye(shared, frame);
+    shared.uSize.value.set(size.width, size.height);
     aim(camera, frame, size.width / Math.max(1, size.height));
     renderer.render(scene, camera);
     const { calls, triangles } = renderer.info.render;

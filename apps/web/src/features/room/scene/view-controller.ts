@@ -25,8 +25,7 @@ export function createViewController(): ViewController {
   function show(goal: ViewFrame, move: boolean) {
     cancelAnimationFrame(request);
     const start = current;
-    const still = matchMedia('(prefers-reduced-motion: reduce)').matches;
-    if (!start || !move || still) {
+    if (!start || !move || matchMedia('(prefers-reduced-motion: reduce)').matches) {
       current = goal;
       tell();
       return;
