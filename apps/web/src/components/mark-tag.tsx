@@ -37,7 +37,7 @@ export function MarkTag({ mark, timber, selected = false, className }: MarkTagPr
   return (
     <span
       className={classNames(
-        'inline-block min-w-[2.1rem] rounded-[1px] border-l-[5px] px-[7px] py-px text-center text-sm font-semibold',
+        'inline-block min-w-[2.6rem] rounded-[1px] border-l-[5px] px-[7px] py-px text-center text-sm font-semibold',
         selected ? 'border-ink bg-ink text-paper' : classNames('text-on-timber', TIMBERS[timber]),
         className,
       )}

@@ -28,9 +28,12 @@ export function useHiddenAside() {
     row.current = element;
     if (element === null) return undefined;
     const note = () => {
-      const next = hiddenIn(
-        element.getBoundingClientRect(),
-        [...element.children].map((child) => child.getBoundingClientRect()),
+      const edges = element.getBoundingClientRect();
+      const items = [...element.children].map((child) => child.getBoundingClientRect());
+      const next = hiddenIn(edges, items);
+      // What is counted as hidden shows no half of its words either.
+      [...element.children].forEach((child, n) =>
+        child.toggleAttribute('data-aside', n < next.before || n >= items.length - next.after),
       );
       setHidden((now) => (now.before === next.before && now.after === next.after ? now : next));
     };

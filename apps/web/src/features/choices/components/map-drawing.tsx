@@ -1,6 +1,7 @@
 import type { Dimension } from '@settlewright/geometry';
 import { memo } from 'react';
 import type { CastMap } from '@settlewright/geometry';
+import { sitterFill } from '@/lib/sitter-colours.ts';
 import { useChoices } from '../choices-view.ts';
 import { contours } from '../contours.ts';
 import { mapNames, outlineOf } from '../map-names.ts';
@@ -116,11 +117,7 @@ export const MapDrawing = memo(function MapDrawing({
         return (
           <g key={region.placeId} fill="none" strokeLinecap="round">
             <path d={line} stroke="var(--color-ink)" strokeWidth={4.2} />
-            <path
-              d={line}
-              stroke={`var(--color-sitter-${((colourOf(region.sitterId) - 1) % 6) + 1})`}
-              strokeWidth={2.6}
-            />
+            <path d={line} stroke={sitterFill(colourOf(region.sitterId))} strokeWidth={2.6} />
           </g>
         );
       })}

@@ -39,7 +39,7 @@ export function FitStrip({ onOpen }: { onOpen: () => void }) {
     <>
       <SittersRow>
         {sheet.rows.map((row) => (
-          <li key={`${row.sitterId}|${row.placeId}`} className="shrink-0">
+          <li key={`${row.sitterId}|${row.placeId}`} className="shrink-0 data-aside:opacity-0">
             <button
               type="button"
               className="quick grid min-h-12 content-center px-1.5 text-left whitespace-nowrap hover:bg-sunk focus-visible:-outline-offset-2"

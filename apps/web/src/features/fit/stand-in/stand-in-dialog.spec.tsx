@@ -47,4 +47,11 @@ describe('StandInDialog', () => {
     expect(screen.queryByLabelText(/Their height/)).toBeNull();
     expect((await screen.findAllByText(/Marcus Adeyemi-Rowe against Hetty Vance/)).length).toBeGreaterThan(0);
   });
+
+  it('asks before a typed height is lost', async () => {
+    showSheet(dialog, { basis });
+    await userEvent.type(screen.getByLabelText(/Their height/), '6');
+    await userEvent.keyboard('{Escape}');
+    expect(screen.getByRole('dialog', { name: 'Discard what you typed?' })).toBeVisible();
+  });
 });

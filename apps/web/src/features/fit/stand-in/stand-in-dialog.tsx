@@ -125,6 +125,7 @@ export function StandInDialog({ open, onClose }: { open: boolean; onClose: () =>
   return (
     <Dialog
       wide
+      losesTyping
       open={open}
       onClose={onClose}
       title="Try a seat with a stand-in"

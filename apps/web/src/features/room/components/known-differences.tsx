@@ -45,6 +45,7 @@ export function KnownDifferences({ document, onReplace }: Props) {
         {list.length > SHOWN && ` And ${list.length - SHOWN} more.`}
       </p>
       <Dialog
+        losesTyping
         open={open}
         onClose={() => setOpen(false)}
         title="Known differences"
@@ -54,6 +55,8 @@ export function KnownDifferences({ document, onReplace }: Props) {
           {list.map((difference, n) => (
             <li key={difference.id} className="flex flex-wrap items-end gap-x-3">
               <TextArea
+                // What is taken on leaving the field is a new field: nothing of it can be lost.
+                key={difference.text}
                 className="min-w-0 flex-1"
                 label={`Difference ${n + 1}`}
                 defaultValue={difference.text}

@@ -98,6 +98,7 @@ export function PiecesPanel({ document, selectedPieceId, onSelect, actions, choo
               >
                 <MarkTag mark={piece.mark} timber={timberOf(piece.kind)} selected={chosen} />
                 <span
+                  title={piece.name || KIND_WORDS[piece.kind]}
                   className={classNames('min-w-0 flex-1 truncate text-[0.94rem]', chosen && 'font-semibold')}
                 >
                   {piece.name || KIND_WORDS[piece.kind]}

@@ -115,7 +115,7 @@ export function RoomDesk({ lastRevision, foot, aboutPiece }: Props) {
           </div>
           <aside
             aria-label="Pieces, plan and notes"
-            className="flex min-h-0 flex-col gap-5 pb-6 max-tablet:order-2 max-tablet:pt-6 tablet:order-1 tablet:overflow-x-hidden tablet:overflow-y-auto tablet:pr-1 tablet:[scrollbar-gutter:stable]"
+            className="flex min-h-0 flex-col gap-5 pb-6 max-tablet:order-2 max-tablet:pt-6 tablet:order-1 tablet:overflow-x-hidden tablet:overflow-y-auto tablet:pr-1 tablet:[scrollbar-gutter:stable] tablet:[scrollbar-width:thin]"
           >
             <PiecesPanel
               document={document}
