@@ -10,6 +10,7 @@ import { measureSet } from '@settlewright/geometry';
 import rules from '@settlewright/seed-data/fit-rules.json';
 import ansur2 from '@settlewright/seed-data/populations/ansur2.json';
 import civilian from '@settlewright/seed-data/populations/civilian-2015.json';
+import { describe, expect, it } from '@jest/globals';
 import { demoDocument, SCENARIO } from './scenario';
 
 const ruleBook = loadRuleBook(rules);
