@@ -324,6 +324,16 @@ describe('a map of two dimensions', () => {
     for (const region of body.regions) expect(region).not.toHaveProperty('rooms');
   });
 
+  it('lets a carpenter not set the steps of an angle against those of a length', async () => {
+    for (const given of [
+      { across: 'seat-height', up: 'seat-tilt' },
+      { across: 'seat-firmness', up: 'seat-height' },
+    ]) {
+      const { fields } = await asks('draft/dimension-map', given, carpenter, 400);
+      expect(fields).toEqual([expect.objectContaining({ code: 'two-lengths' })]);
+    }
+  });
+
   it('refuses the same dimension twice', async () => {
     const { fields } = await asks('draft/dimension-map', { ...asked, up: 'seat-height' }, owner, 400);
     expect(fields).toEqual([expect.objectContaining({ path: 'up', code: 'same-dimension' })]);
@@ -430,6 +440,19 @@ describe('questions that cannot be answered', () => {
     const { fields } = await asks('draft/story-stick', body, reader, 400);
     expect(fields[0].path).toBe(path);
     expect(fields[0].message).toMatch(message);
+  });
+
+  it('leave out what is sent as null', async () => {
+    const nothing = { populationId: null, womenPercent: null, units: null, roundTo: null, draftNumber: null };
+    const asked = { dimension: 'seat-firmness' };
+    const nulls = { ...asked, ...nothing, pieceId: null, value: null, ruleId: null };
+    expect(await asks('draft/story-stick', nulls)).toEqual(await asks('draft/story-stick', asked));
+    const version = { setId: null, draftNumber: null };
+    const to = { ...version, revisionLetter: 'A' };
+    const { from } = await asks('comparison', { from: { ...version, revisionLetter: null }, to });
+    expect(from.draftNumber).toBe(2);
+    const { placeId } = sitters()[0]!;
+    await asks('draft/stand-in', { placeId, castId: null, person: { statureMm: 1600 }, draftNumber: null });
   });
 
   it('are about another draft or revision', async () => {

@@ -246,7 +246,8 @@ describe('a search for dimensions', () => {
     const [one, other] = await Promise.all([start(), start()]);
     expect(other.id).toBe(one.id);
     expect((await start()).id).toBe(one.id);
-    const another = await start({ womenPercent: 61 });
+    const another = await start({ womenPercent: 57 });
+    expect(another).toMatchObject({ womenPercent: 57 });
     expect(another.id).not.toBe(one.id);
     const jobs = await test.dataSource.query(`SELECT 1 FROM jobs.job WHERE data::text LIKE $1`, [
       `%${one.id}%`,

@@ -44,6 +44,7 @@ export class DimensionMaps {
     const fineness = seesMeasures(member) ? fine(style) : COARSE;
     const { document } = version;
     const { across, up } = readBoth(document, asked);
+    if (fineness === COARSE) refuseUnlikeUnits(across, up);
     const { populationId, womenPercent } = asked;
     const crowd =
       populationId === undefined
@@ -107,6 +108,18 @@ function readBoth(document: SetDocument, asked: AskMapDto): { across: Dimension;
   const base = across.at(across.value) ?? document;
   const up = dimensionOf(base, asked.up) ?? readDimension(document, { dimension: asked.up }, 'up');
   return { across, up };
+}
+
+/**
+ * Lengths that move in the same step move a body from place to place in that step. With an angle or a firmness between
+ * them the steps of the two interlock as those of a vernier, and a body could be read off much more finely.
+ */
+function refuseUnlikeUnits(across: Dimension, up: Dimension): void {
+  const path = across.unit === 'mm' ? 'up' : 'across';
+  const { id, unit } = path === 'up' ? up : across;
+  if (unit === 'mm') return;
+  const message = `read "${id}", which is no length; accepted of who sees no measures: two lengths`;
+  throw Problem.invalid([{ path, code: 'two-lengths', message }]);
 }
 
 /** How much room a body has is for who sees measures. */

@@ -72,7 +72,7 @@ export function fine(style: LengthStyle): Fineness {
 
 /**
  * For whoever sees no measures: where a verdict turns says as much of a body as a margin, so values stand in the steps
- * of shown margins from the present value, and no further from it than margins are shown. Together they tell no more.
+ * of shown margins from the present value, and no further from it than margins are shown. Lengths together tell no more.
  */
 export const COARSE: Fineness = {
   step: ({ unit }) => COARSE_STEPS[unit],

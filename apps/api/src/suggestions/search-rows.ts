@@ -17,7 +17,7 @@ const WHOLE = 100;
 export function begunSearch(
   { userId }: MemberInfo,
   setId: string,
-  { draftNumber, revisionLetter }: StartSuggestionDto,
+  { draftNumber, revisionLetter, womenPercent }: StartSuggestionDto,
   { question, told, digest }: { question: SearchQuestion; told: ToldDimension[]; digest: string },
 ): Partial<DimensionSearch> {
   const { crowd } = question;
@@ -34,7 +34,7 @@ export function begunSearch(
     free: told,
     served: [...sitters.values()],
     population: crowd ? toldPopulation(crowd.crowd) : null,
-    womenPercent: crowd?.womenShare === undefined ? null : crowd.womenShare * WHOLE,
+    womenPercent: crowd?.womenShare === undefined ? null : (womenPercent ?? crowd.womenShare * WHOLE),
     state: 'queued',
     done: 0,
     most: 0,

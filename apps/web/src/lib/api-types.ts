@@ -3042,7 +3042,7 @@ export interface components {
             draftNumber?: number;
             /** @description id of the number that goes across, as for a story stick */
             across: string;
-            /** @description id of the number that goes up */
+            /** @description id of the number that goes up; for who sees no measures both are lengths */
             up: string;
             /**
              * @description ask every check of a person that either number moves, not only the two numbers’ own

@@ -1,5 +1,6 @@
 import { ApiProperty, ApiPropertyOptional } from '@nestjs/swagger';
-import { IsBoolean, IsIn, IsInt, IsNumber, IsOptional, IsString, Max, MaxLength, Min } from 'class-validator';
+import { IsBoolean, IsIn, IsInt, IsNumber, IsString, Max, MaxLength, Min } from 'class-validator';
+import { MayBeLeftOut } from '../../common/may-be-left-out';
 import {
   ROUNDINGS,
   type Rounding,
@@ -15,13 +16,13 @@ export class AskedChoiceDto {
     description:
       'whose shares are counted: one that comes with the product, as `us-civilians-2015`, or one of the workshop’s own; no shares when absent',
   })
-  @IsOptional()
+  @MayBeLeftOut()
   @IsString()
   @MaxLength(ID_MAX)
   populationId?: string;
 
   @ApiPropertyOptional({ minimum: 0, maximum: 100, description: 'women of 100 people; 50 when absent' })
-  @IsOptional()
+  @MayBeLeftOut()
   @IsNumber()
   @Min(0)
   @Max(100)
@@ -31,12 +32,12 @@ export class AskedChoiceDto {
     enum: UNIT_SYSTEMS,
     description: 'decides the step of values, and the words of a paper; the production’s when absent',
   })
-  @IsOptional()
+  @MayBeLeftOut()
   @IsIn(UNIT_SYSTEMS)
   units?: UnitSystem;
 
   @ApiPropertyOptional({ enum: ROUNDINGS, description: 'fractions of an inch; the production’s when absent' })
-  @IsOptional()
+  @MayBeLeftOut()
   @IsIn(ROUNDINGS)
   roundTo?: Rounding;
 
@@ -44,7 +45,7 @@ export class AskedChoiceDto {
     minimum: 1,
     description: 'for a draft: the one that was seen; another one is refused. Any when absent',
   })
-  @IsOptional()
+  @MayBeLeftOut()
   @IsInt()
   @Min(1)
   draftNumber?: number;
@@ -56,7 +57,9 @@ export class AskMapDto extends AskedChoiceDto {
   @MaxLength(ID_MAX)
   across: string;
 
-  @ApiProperty({ description: 'id of the number that goes up' })
+  @ApiProperty({
+    description: 'id of the number that goes up; for who sees no measures both are lengths',
+  })
   @IsString()
   @MaxLength(ID_MAX)
   up: string;
@@ -65,7 +68,7 @@ export class AskMapDto extends AskedChoiceDto {
     default: false,
     description: 'ask every check of a person that either number moves, not only the two numbers’ own',
   })
-  @IsOptional()
+  @MayBeLeftOut()
   @IsBoolean()
   everyCheck?: boolean;
 }
@@ -80,7 +83,7 @@ export class AskStickDto extends AskedChoiceDto {
   dimension: string;
 
   @ApiPropertyOptional({ description: 'the kind’s number of this piece alone' })
-  @IsOptional()
+  @MayBeLeftOut()
   @IsString()
   @MaxLength(ID_MAX)
   pieceId?: string;
@@ -89,7 +92,7 @@ export class AskStickDto extends AskedChoiceDto {
     description:
       'value that is tried, in the unit of the number (mm, degrees or newtons); the present one when absent',
   })
-  @IsOptional()
+  @MayBeLeftOut()
   @IsNumber()
   value?: number;
 
@@ -97,7 +100,7 @@ export class AskStickDto extends AskedChoiceDto {
     description:
       'rule of a person whose stretches are wanted, or `all` for every one that the number moves; the number’s own when absent',
   })
-  @IsOptional()
+  @MayBeLeftOut()
   @IsString()
   @MaxLength(ID_MAX)
   ruleId?: string;

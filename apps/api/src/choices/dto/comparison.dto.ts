@@ -5,13 +5,13 @@ import {
   IsDefined,
   IsInt,
   IsObject,
-  IsOptional,
   IsString,
   IsUUID,
   MaxLength,
   Min,
   ValidateNested,
 } from 'class-validator';
+import { MayBeLeftOut } from '../../common/may-be-left-out';
 import { CountsDto } from '../../sets/dto/fit-sheet.dto';
 import { VersionStateDto } from './story-stick.dto';
 
@@ -22,18 +22,18 @@ export class AskedVersionDto {
     format: 'uuid',
     description: 'another set of the production; the one of the path when absent',
   })
-  @IsOptional()
+  @MayBeLeftOut()
   @IsUUID()
   setId?: string;
 
   @ApiPropertyOptional({ description: 'an issued revision; the draft when absent' })
-  @IsOptional()
+  @MayBeLeftOut()
   @IsString()
   @MaxLength(LETTER_MAX)
   revisionLetter?: string;
 
   @ApiPropertyOptional({ minimum: 1, description: 'the draft that was seen; any when absent' })
-  @IsOptional()
+  @MayBeLeftOut()
   @IsInt()
   @Min(1)
   draftNumber?: number;

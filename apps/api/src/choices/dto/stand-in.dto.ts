@@ -1,16 +1,8 @@
 import type { PartDifference, StandInCheck } from '@settlewright/anthropometry';
 import { ApiProperty, ApiPropertyOptional, PickType } from '@nestjs/swagger';
 import { Type } from 'class-transformer';
-import {
-  IsInt,
-  IsObject,
-  IsOptional,
-  IsString,
-  IsUUID,
-  MaxLength,
-  Min,
-  ValidateNested,
-} from 'class-validator';
+import { IsInt, IsObject, IsString, IsUUID, MaxLength, Min, ValidateNested } from 'class-validator';
+import { MayBeLeftOut } from '../../common/may-be-left-out';
 import { CreateCastMemberDto } from '../../cast/dto/save-cast-member.dto';
 import { ShownRuleDto, VersionStateDto } from './story-stick.dto';
 
@@ -38,19 +30,19 @@ export class AskStandInDto {
     format: 'uuid',
     description: 'a cast member who tries the seat; either this or `person`',
   })
-  @IsOptional()
+  @MayBeLeftOut()
   @IsUUID()
   castId?: string;
 
   @ApiPropertyOptional({ type: StrangerDto, description: 'somebody else who tries it; a stature is needed' })
-  @IsOptional()
+  @MayBeLeftOut()
   @IsObject()
   @ValidateNested()
   @Type(() => StrangerDto)
   person?: StrangerDto;
 
   @ApiPropertyOptional({ minimum: 1, description: 'for a draft: the one that was seen; any when absent' })
-  @IsOptional()
+  @MayBeLeftOut()
   @IsInt()
   @Min(1)
   draftNumber?: number;
