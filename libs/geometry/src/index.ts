@@ -50,6 +50,8 @@ export { planOf, type PlanOptions } from './drawing/plan.ts';
 export { frontOf } from './drawing/front.ts';
 export { askedShapes } from './drawing/asked.ts';
 export { sectionOf } from './drawing/section.ts';
+export * from './drawing/drawing-scale.ts';
+export { VIEW_DIRECTIONS, type SetView, type ViewDirection } from './drawing/set-view.ts';
 export { cushionDrawing, type CushionDrawing } from './drawing/cushion-drawing.ts';
 export { boardLines, type BoardLines } from './cushions/board-lines.ts';
 export { cushionRuns, cushionRunsOf, type CushionRun } from './cushions/cushion-runs.ts';

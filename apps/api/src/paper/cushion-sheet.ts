@@ -1,10 +1,9 @@
-import { formatLength, lengthStep } from '@settlewright/geometry';
+import { formatLength, lengthStep, scaleFor } from '@settlewright/geometry';
 import { CHECK_BAR_MM, drawCheckBar } from './check-bar';
 import { spaceAbove, spaces } from './cushion-chains';
 import { drawFactsColumn, FACTS_WIDTH_MM, PAD, zipWords } from './cushion-facts';
 import { drawCushionPlan } from './cushion-plan';
 import { drawCushionCut, drawCushionFront } from './cushion-views';
-import { scaleFor } from './drawing-scale';
 import { paragraph } from './paragraph';
 import { chainSide, type CushionPlan, PLAN_SPACE } from './plan-place';
 import { leading, PEN, type Sheet } from './sheet';

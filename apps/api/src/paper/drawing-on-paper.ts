@@ -1,13 +1,14 @@
 import {
   type DimensionShape,
   type Drawing,
+  type DrawingScale,
   type DrawShape,
   type Fill,
   formatLength,
   type LengthStyle,
   type Pen,
+  scaleFor,
 } from '@settlewright/geometry';
-import { type DrawingScale, scaleFor } from './drawing-scale';
 import { PEN, type Point, type Sheet } from './sheet';
 
 const PENS: Record<Pen, number> = {

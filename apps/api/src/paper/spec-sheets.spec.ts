@@ -1,10 +1,9 @@
 import { describe, expect, it } from '@jest/globals';
 import fc from 'fast-check';
 import { jsPDF } from 'jspdf';
-import { curveWords } from '@settlewright/geometry';
+import { curveWords, scaleFor } from '@settlewright/geometry';
 import { CHECK_BAR_MM, drawCheckBar } from './check-bar';
 import { type Chain, chainDepth, drawChain } from './dimension-chain';
-import { scaleFor } from './drawing-scale';
 import { breakLines } from './paragraph';
 import { spaces } from './cushion-chains';
 import { Sheet, type TextStyle } from './sheet';
