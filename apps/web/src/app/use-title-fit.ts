@@ -59,11 +59,14 @@ export function useTitleFit(cells: readonly TitleCell[]): {
     }
     const fitted = cells.map((cell) => {
       const natural = naturalPx(known.current.get(saysOf(cell)) ?? 0);
-      return { ...cell, leastPx: cell.shortens ? Math.min(natural, namePx) : natural };
+      return { ...cell, natural, leastPx: cell.shortens ? Math.min(natural, namePx) : natural };
     });
     for (const box of standing) {
       const cell = fitted.find(({ id }) => id === box.dataset.cell);
-      if (cell) box.style.minWidth = `${cell.leastPx}px`;
+      if (!cell) continue;
+      box.style.minWidth = `${cell.leastPx}px`;
+      // A long name gives more of itself, so that a short one stays whole.
+      box.style.flexShrink = String(Math.max(1, (cell.natural - cell.leastPx) ** 2 / cell.natural));
     }
     const fixedPx = [...element.querySelectorAll<HTMLElement>('[data-fixed]')].map((box) => {
       const words = wordsPx(box);

@@ -193,7 +193,7 @@ export function DataTable<Row extends RowData>({
                       quietOnPhone(column, row.original) && 'max-tablet:hidden',
                     )}
                   >
-                    <span aria-hidden="true" className="text-sm text-ink-3 tablet:hidden">
+                    <span aria-hidden="true" className="shrink-0 text-sm text-ink-3 tablet:hidden">
                       {column?.header}
                     </span>
                     {content}

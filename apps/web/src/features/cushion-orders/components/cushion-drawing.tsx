@@ -43,7 +43,7 @@ function DimensionLines({ shape, at }: { shape: DimensionShape; at: At }) {
 /** The number of a dimension on its ground, over all lines. */
 function DimensionNumber({ shape, at, text }: { shape: DimensionShape; at: At; text: string }) {
   const [x, y] = dimensionLine(shape, at).middle;
-  const width = textWidthPx(text) + 4;
+  const width = textWidthPx(text) + 10;
   return (
     <>
       <rect x={x - width / 2} y={y - 8} width={width} height="16" fill="var(--color-paper)" />

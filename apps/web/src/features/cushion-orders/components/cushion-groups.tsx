@@ -133,7 +133,7 @@ function Group({ group, words }: { group: CushionGroup; words: OrderSpec }) {
             leastPx={500}
           />
           <p className="mt-4 border-t border-rule pt-2 text-sm text-ink-2">From the front</p>
-          <CushionDrawing drawing={drawing.front} label={`${first}, front edge`} leastPx={340} />
+          <CushionDrawing drawing={drawing.front} label={`${first}, front edge`} leastPx={410} />
           <p className="mt-4 border-t border-rule pt-2 text-sm text-ink-2">
             Cut from back to front, front at the right, not loaded
           </p>
