@@ -77,9 +77,16 @@ function legStretches(f: Figure, stance: Stance): Stretch[] {
   const toe = 0.22 * f.FB;
   const sole = -f.MH - stance.shoeMm;
   const thigh: Ball = [onThigh([first.centreX, f.TC / 2, first.z]), f.TC / 2];
-  const heelBall: Ball = [onFoot([0, sole + heel, heel - 0.255 * f.FL]), heel];
+  // A heel turned against the shin keeps some of its flesh with the shin.
+  const heelIn = clamp(HEEL_IN_MM * (stance.footRad - stance.shinRad), -3, 9);
+  const heelBall: Ball = [onFoot([0, sole + heel, heel + heelIn - 0.255 * f.FL]), heel];
+  // Toes turned out stay as long as the skin is, though the inner ball comes forward.
   const toeBall = (out: number): Ball => [
-    onFoot([out * (f.FB / 2 - toe), sole + toe, 0.745 * f.FL - toe]),
+    onFoot([
+      out * (f.FB / 2 - toe),
+      sole + toe,
+      0.745 * f.FL - toe - (out < 0 ? (f.FB / 2 - toe) * Math.sin(stance.toesOutRad) : 0),
+    ]),
     toe,
   ];
   return [
@@ -191,5 +198,6 @@ export function bodySegments(f: Figure, stance: Stance, placement: BodyPlacement
 /** How far the back of the belt stands before the rearmost buttock: less on a thin body. */
 const beltHollow = (f: Figure): number => mix(26.5, 22.5, clamp((23 - f.bodyMassIndex) / 5, 0, 1));
 const YOKE_MM = 45;
+const HEEL_IN_MM = 22;
 /** The solved skin has its feet this much further back than the joints, give or take 2. */
 const FOOT_BACK_MM = 1.5;

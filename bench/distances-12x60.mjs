@@ -1,0 +1,41 @@
+import { createRequire } from 'node:module';
+import { createBodyModel } from '@settlewright/anthropometry';
+import { deriveParts, measureSet, placeFrames, poseMannequin, sitterDistances } from '@settlewright/geometry';
+import { roomOfTwelve } from './lib/room-of-twelve.mjs';
+
+const load = createRequire(import.meta.url);
+const PARTS = 60;
+const WARM_UP = 30;
+const RUNS = 60;
+
+/** Time to find contacts, overlaps and the smallest gap of twelve sitters among the sixty parts nearest to them. */
+export async function run() {
+  const model = createBodyModel(load('@settlewright/seed-data/populations/ansur2.json'));
+  const document = roomOfTwelve();
+  const situation = measureSet(document);
+  const frames = document.pieces.flatMap((piece) => placeFrames(piece, document));
+  const bodies = document.seating.map(({ pieceId, place, sitter }) => {
+    const placeId = `${pieceId}:${place}`;
+    const means = model.predict(model.mannequin(sitter)).means();
+    const frame = frames.find((one) => one.placeId === placeId);
+    const measured = situation.places.find((one) => one.placeId === placeId);
+    return {
+      placeId,
+      pieceId,
+      pose: poseMannequin({ means, shoeMm: 25, frame, situation: measured, sinkMm: 10 }),
+    };
+  });
+  const away = ({ positionMm: [x, , z] }) =>
+    Math.min(...bodies.map(({ pose }) => Math.hypot(x - pose.joints.pelvis[0], z - pose.joints.pelvis[2])));
+  const parts = deriveParts(document)
+    .sort((a, b) => away(a) - away(b))
+    .slice(0, PARTS);
+  const times = [];
+  for (let i = 0; i < WARM_UP + RUNS; i += 1) {
+    const start = performance.now();
+    sitterDistances(bodies, parts);
+    if (i >= WARM_UP) times.push(performance.now() - start);
+  }
+  times.sort((a, b) => a - b);
+  return [{ name: 'distances-12x60', value: times[RUNS / 2], unit: 'ms', aim: 5, reference: null }];
+}

@@ -1,0 +1,54 @@
+import type { Vec3 } from '../parts/part.ts';
+import { coreDistance } from './core-distance.ts';
+import { depthOf } from './depth.ts';
+import { boundsGap, type Shape } from './shape.ts';
+
+/** How near two solids come to each other, and where. */
+export interface Gap {
+  /** Below 0 where they reach into each other: the shortest way that would part them. */
+  distanceMm: number;
+  /** Nearest point of the one, or its deepest in the other; room frame. */
+  fromMm: Vec3;
+  /** The same of the other. */
+  toMm: Vec3;
+  /** Unit vector from the one to the other; where they meet, the way the other would have to go. */
+  direction: Vec3;
+}
+
+/**
+ * Exact distance of two convex solids.
+ *
+ * @param one - a solid
+ * @param other - another solid
+ * @param atMostMm - larger distances are of no matter
+ * @returns the gap within 0.01 mm, overlaps within 0.1 mm (0.5 mm deep inside of round solids); `undefined` beyond the
+ * limit
+ */
+export function gapBetween(one: Shape, other: Shape, atMostMm = Infinity): Gap | undefined {
+  if (boundsGap(one, other) > atMostMm) return undefined;
+  const margins = one.marginMm + other.marginMm;
+  const cores = coreDistance(one, other, atMostMm + margins);
+  if (!cores) return undefined;
+  const { distanceMm, from, to } = cores;
+  if (distanceMm === 0) {
+    const { depthMm, direction, ...points } = depthOf(one, other);
+    return { distanceMm: -depthMm, fromMm: points.from, toMm: points.to, direction };
+  }
+  if (distanceMm - margins > atMostMm) return undefined;
+  const direction: Vec3 = [
+    (to[0] - from[0]) / distanceMm,
+    (to[1] - from[1]) / distanceMm,
+    (to[2] - from[2]) / distanceMm,
+  ];
+  const on = (p: Vec3, radius: number): Vec3 => [
+    p[0] + radius * direction[0],
+    p[1] + radius * direction[1],
+    p[2] + radius * direction[2],
+  ];
+  return {
+    distanceMm: distanceMm - margins,
+    fromMm: on(from, one.marginMm),
+    toMm: on(to, -other.marginMm),
+    direction,
+  };
+}
