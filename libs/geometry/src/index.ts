@@ -108,3 +108,5 @@ export { clashOf, MOST_FREE, SEARCH_PEOPLE, SEARCH_SEED } from './choices/free-d
 export { judgeChoices, type Judging, type Served } from './choices/judge-choices.ts';
 export { suggestDimensions } from './choices/suggest-dimensions.ts';
 export type { Answer, AnswerKind, Blame, Suggestion } from './choices/suggest-dimensions.ts';
+export { findWaysIn, type Comer, type WaysIn } from './ways-in/find-ways-in.ts';
+export type { Move, TightSpot, WayIn, WayStep } from './ways-in/way-in.ts';
