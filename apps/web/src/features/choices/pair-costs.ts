@@ -1,5 +1,5 @@
 import type { FitSheet, RuleBook } from '@settlewright/anthropometry';
-import { isLoss, sheetChanges, type BestPair, type CellChange } from '@settlewright/geometry';
+import { isLoss, sheetChanges, type BestPair, type CellChange, type CellState } from '@settlewright/geometry';
 import { joinWords } from '@/lib/dimension-words.ts';
 import { shortName } from '@/lib/short-name.ts';
 
@@ -44,4 +44,6 @@ export function pricedPairs(
     .sort((a, b) => a.turnedAway - b.turnedAway);
 }
 
-const isAway = ({ from, to }: CellChange): boolean => from !== 'notKnown' && to !== 'tight';
+const MET: readonly CellState[] = ['fits', 'tight', 'inside'];
+
+const isAway = ({ from, to }: CellChange): boolean => MET.includes(from) && !MET.includes(to);

@@ -11,6 +11,8 @@ import { shortName } from '@/lib/short-name.ts';
 interface BestPairsProps {
   pairs: readonly PricedPair[];
   map: CastMap;
+  /** The public is counted; a share that is missing then is not known. */
+  isCounted: boolean;
   first: Dimension;
   second: Dimension;
   onTake: ((pair: PricedPair) => void) | undefined;
@@ -19,7 +21,7 @@ interface BestPairsProps {
 const CELL = 'border-b border-rule py-2 pr-5 text-left align-baseline';
 
 /** The best pairs of values in words; the map for those who do not see it. */
-export function BestPairs({ pairs, map, first, second, onTake }: BestPairsProps) {
+export function BestPairs({ pairs, map, isCounted, first, second, onTake }: BestPairsProps) {
   const { style } = useChoices();
   const people = map.regions.length;
   return (
@@ -65,7 +67,11 @@ export function BestPairs({ pairs, map, first, second, onTake }: BestPairsProps)
                   </span>
                 </td>
                 <td className={CELL}>
-                  {pair.share === undefined ? 'not counted yet' : aboutInHundred(pair.share)}
+                  {pair.share !== undefined
+                    ? aboutInHundred(pair.share)
+                    : isCounted
+                      ? 'not known'
+                      : 'not counted yet'}
                 </td>
                 {onTake && (
                   <td className={CELL}>

@@ -127,7 +127,14 @@ export function TwoDimensions({
             {!shares && !fault && <LoadingLine words="Counting people" />}
             <MapWords map={map} />
           </div>
-          <BestPairs pairs={pairs} map={map} first={first} second={second} onTake={replace && take} />
+          <BestPairs
+            pairs={pairs}
+            map={map}
+            isCounted={shares !== undefined}
+            first={first}
+            second={second}
+            onTake={replace && take}
+          />
         </div>
       )}
     </section>
