@@ -1,5 +1,5 @@
 import { expect, it } from 'vitest';
-import { countedWords, EVERY_PLACE } from './counted-words.ts';
+import { countedWords, EVERY_PLACE, sharesDiffer } from './counted-words.ts';
 
 it.each([
   [
@@ -15,3 +15,12 @@ it.each([
     'Counted are people who fit all 14 checks that are asked here at once, at every place of the set.',
   ],
 ] as const)('%o', (counted, words) => expect(countedWords(counted)).toBe(words));
+
+it.each([
+  ['whoFits', /“Who fits”/, [/story stick/, /“Suggest dimensions”/]],
+  ['stick', /story stick/, [/“Who fits”/, /“Suggest dimensions”/]],
+  ['suggest', /“Suggest dimensions”/, [/“Who fits”/, /story stick/]],
+] as const)('%s tells of the other pages, not of itself', (here, own, others) => {
+  expect(sharesDiffer(here)).not.toMatch(own);
+  for (const other of others) expect(sharesDiffer(here)).toMatch(other);
+});

@@ -21,8 +21,14 @@ export function countedWords({ passes, checks, places }: Counted): string {
 
 export const EVERY_PLACE = 'every place of the set';
 
-/** Why a share here and one there are not the same number. */
-export const SHARES_DIFFER =
-  'Other pages count otherwise: “Who fits” counts people who fit all ticked checks at every place; a story stick, ' +
-  'people who fit the checks that it shows, at the places that it moves; “Suggest dimensions”, people who are at ' +
-  'least tight in the checks that its ranges change.';
+const PAGES = {
+  whoFits: '“Who fits” counts people who fit all ticked checks at every place',
+  stick: 'a story stick counts people who fit the checks that it shows, at the places that it moves',
+  suggest: '“Suggest dimensions” counts people who are at least tight in the checks that its ranges change',
+} as const;
+
+/** Why a share on this page and one on another are not the same number. */
+export function sharesDiffer(here: keyof typeof PAGES): string {
+  const others = Object.entries(PAGES).flatMap(([page, words]) => (page === here ? [] : [words]));
+  return `Other pages count otherwise: ${others.join('; ')}.`;
+}

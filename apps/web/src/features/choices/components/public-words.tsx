@@ -3,7 +3,7 @@ import { memo } from 'react';
 import { Disclosure } from '@/components/disclosure.tsx';
 import { LoadingLine } from '@/components/loading.tsx';
 import { Measure } from '@/components/measure.tsx';
-import { countedWords, SHARES_DIFFER } from '@/lib/crowd/counted-words.ts';
+import { countedWords, sharesDiffer } from '@/lib/crowd/counted-words.ts';
 import { aboutInHundred, exactValue } from '@/lib/dimension-words.ts';
 import { useChoices } from '../choices-view.ts';
 import { shareAt, type ShareCurves } from '../use-share-curve.ts';
@@ -68,7 +68,7 @@ export const PublicWords = memo(function PublicWords({
         ))}
       </dl>
       <p className="mt-1 max-w-text text-ink-2">
-        {counted} Dashed, every check of a person at the same places. {SHARES_DIFFER}
+        {counted} Dashed, every check of a person at the same places. {sharesDiffer('stick')}
       </p>
       <p className="mt-1 max-w-text text-ink-2">
         {rejection && (

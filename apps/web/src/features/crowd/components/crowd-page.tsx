@@ -8,7 +8,7 @@ import { PageHeading } from '@/components/page-heading.tsx';
 import { PopulationFields } from '@/components/population-fields.tsx';
 import { announce } from '@/lib/announce.ts';
 import { CROWDS, crowdWords, DEFAULT_CROWD, type CrowdChoice } from '@/lib/crowd/crowds.ts';
-import { countedWords, EVERY_PLACE, SHARES_DIFFER } from '@/lib/crowd/counted-words.ts';
+import { countedWords, EVERY_PLACE, sharesDiffer } from '@/lib/crowd/counted-words.ts';
 import { useOwnCrowd, useOwnCrowds } from '@/lib/crowd/own-crowds.ts';
 import { usePageTitle } from '@/lib/page-title.ts';
 import { useWorkshop } from '@/lib/workshop.ts';
@@ -128,7 +128,7 @@ function Counted() {
                     checks: isPart ? [...ticked].map(nameOf) : all.length,
                     places: EVERY_PLACE,
                   })}{' '}
-                  {SHARES_DIFFER}
+                  {sharesDiffer('whoFits')}
                 </p>
                 <p className="mt-2">
                   {rejectionWords(joint.shares.rejectsMost, joint.shares.rejectsNext, ruleBook)}{' '}

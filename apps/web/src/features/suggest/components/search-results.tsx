@@ -3,7 +3,7 @@ import { useMemo } from 'react';
 import { Notice } from '@/components/notice.tsx';
 import { RuleHeading } from '@/components/rule-heading.tsx';
 import { dimensionValue, sentence } from '@/lib/dimension-words.ts';
-import { SHARES_DIFFER } from '@/lib/crowd/counted-words.ts';
+import { sharesDiffer } from '@/lib/crowd/counted-words.ts';
 import { checkWords, effectsOf } from '../effects.ts';
 import type { SearchTold } from '../search.ts';
 import { useSuggestView } from '../suggest-view.ts';
@@ -100,7 +100,7 @@ export function SearchResults({
             The public
           </RuleHeading>
           <p className="text-sm text-ink-2">
-            {publicWords(told, (id) => checkWords(ruleBook, id))} {SHARES_DIFFER}{' '}
+            {publicWords(told, (id) => checkWords(ruleBook, id))} {sharesDiffer('suggest')}{' '}
             {[crowdName, people.source, ...people.cautions].map(sentence).join(' ')}
           </p>
         </section>

@@ -112,6 +112,27 @@ describe('suggested dimensions', () => {
     expect(kept?.on).toMatch(/^\d{4}-\d\d-\d\d$/);
   });
 
+  it('does not search with a survey that was removed, and says why', async () => {
+    const id = '11111111-2222-4333-8444-555555555555';
+    const survey = { id, name: 'The crew', women: 58, men: 60 };
+    server.use(
+      http.get('*/populations', () =>
+        HttpResponse.json({ items: [survey], total: 1, page: 1, pageSize: 200 }),
+      ),
+      http.get(`*/populations/${id}`, () =>
+        HttpResponse.json({ title: 'Not found', status: 404, code: 'not-found' }, { status: 404 }),
+      ),
+    );
+    const { user } = show();
+    await user.click(screen.getByRole('combobox', { name: 'Population' }));
+    await user.click(await screen.findByRole('option', { name: /The crew/ }));
+    expect(await screen.findByText(/This survey was removed from the workshop/)).toBeVisible();
+    expect(screen.getByRole('button', { name: 'Search' })).toBeDisabled();
+    expect(screen.getByText('Choose another population, or untick it, to search.')).toBeVisible();
+    await user.click(screen.getByRole('checkbox', { name: /as many as can be of a population/ }));
+    expect(screen.getByRole('button', { name: 'Search' })).toBeEnabled();
+  });
+
   it('says once that a place has no body behind it', () => {
     const { unmount } = show({ placesWithoutBody: 2 });
     expect(screen.getByText(/^2 places have no body behind them/)).toHaveTextContent(/never count as served/);

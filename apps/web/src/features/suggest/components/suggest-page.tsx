@@ -87,7 +87,7 @@ function Searching() {
 
   useEffect(() => {
     // What was kept in this tab goes on once, when the page opens.
-    const waits = form.crowd !== null && ownCrowd.isPending;
+    const waits = form.crowd !== null && (ownCrowd.isPending || ownCrowd.error !== null);
     if (!run && kept && kept.state !== 'stopped' && kept.question === question && !waits) {
       start({ form, question, asked, known: kept.tried });
     }
@@ -117,13 +117,13 @@ function Searching() {
           <WhomToServe form={form} own={own} onChange={setForm} />
           {ownCrowd.error && (
             <Notice tone="wont" className="mt-4">
-              The survey could not be fetched. Choose another population, or try again.
+              {ownCrowd.error.message}
             </Notice>
           )}
           <div className="mt-6 flex flex-wrap items-center gap-4">
             <Button
               look="main"
-              disabled={nothing || ownCrowd.isPending}
+              disabled={nothing || ownCrowd.isPending || ownCrowd.error !== null}
               busy={isRunning && !isStale}
               busyWords="Searching"
               onClick={begin}
@@ -133,7 +133,9 @@ function Searching() {
             <p className="text-sm text-ink-2">
               {nothing
                 ? 'Tick something that may move, and somebody to serve.'
-                : 'A few seconds. The set stays as it is until you take an answer.'}
+                : ownCrowd.error
+                  ? 'Choose another population, or untick it, to search.'
+                  : 'A few seconds. The set stays as it is until you take an answer.'}
             </p>
           </div>
         </div>
