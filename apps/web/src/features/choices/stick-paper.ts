@@ -1,5 +1,5 @@
 import type { Dimension, LengthStyle } from '@settlewright/geometry';
-import type { CrowdChoice } from '@/lib/crowd/crowds.ts';
+import { onlySex, type CrowdChoice, type CrowdOption } from '@/lib/crowd/crowds.ts';
 
 /** What the server draws a stick of: as `AskStickDto` of the API reads it. */
 export interface StickPaper {
@@ -8,7 +8,8 @@ export interface StickPaper {
   value: number;
   ruleId: string;
   populationId: string;
-  womenPercent: number;
+  /** Absent where the population holds one sex. */
+  womenPercent?: number;
   units: LengthStyle['system'];
   roundTo: LengthStyle['roundTo'];
 }
@@ -18,6 +19,7 @@ export function stickPaper(
   value: number,
   ruleId: string,
   { populationId, women }: CrowdChoice,
+  options: readonly CrowdOption[],
   { system, roundTo }: LengthStyle,
 ): StickPaper {
   return {
@@ -25,7 +27,7 @@ export function stickPaper(
     value,
     ruleId,
     populationId,
-    womenPercent: women,
+    ...(onlySex(populationId, options) ? {} : { womenPercent: women }),
     units: system,
     roundTo,
   };

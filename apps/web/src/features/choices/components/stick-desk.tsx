@@ -79,8 +79,8 @@ export function StickDesk({ tried, stick, rule, crowd, asked, onCrowd }: StickDe
   ].join('; ');
   const hung = trying === undefined ? present : (rested ?? present);
   const paper = useMemo(
-    () => stickPaper(dimension, hung, rule, crowd, style),
-    [dimension, hung, rule, crowd, style],
+    () => stickPaper(dimension, hung, rule, crowd, asked.options, style),
+    [dimension, hung, rule, crowd, asked.options, style],
   );
   const common = useMemo(
     () => commonWords(stick, { present, step: tried.step, style }),

@@ -236,6 +236,17 @@ describe('the paper', () => {
     });
     expect(await screen.findByText('Somebody saved a newer draft meanwhile.')).toBeVisible();
   });
+
+  it('asks for no mix where the population holds one sex', async () => {
+    const paper = vi.fn(() => Promise.resolve());
+    const user = userEvent.setup();
+    showStick({ paper }, '?d=seat-height&people=german');
+    await slider();
+    await user.click(screen.getByRole('button', { name: 'Save as PDF' }));
+    const [, sent] = paper.mock.lastCall as unknown as [string, object];
+    expect(sent).toMatchObject({ populationId: 'german' });
+    expect(sent).not.toHaveProperty('womenPercent');
+  });
 });
 
 describe('the public', () => {
