@@ -95,6 +95,8 @@ beforeAll(async () => {
   carpenter = await createMember(test, place.workshop.id, 'carpenter');
   const draft = (await as(test, owner).get(`${place.setPath}/draft`).expect(200)).body;
   document = draft.document;
+  // Seats and table: walls and sills would double the work of each set that is tried.
+  document.pieces = document.pieces.filter(({ kind }) => kind === 'bench' || kind === 'table');
   const bench = document.pieces.find(({ kind }) => kind === 'bench')!;
   document.seating = castIds.map((castId, n) => ({
     pieceId: bench.id,
@@ -112,8 +114,16 @@ beforeAll(async () => {
 });
 afterAll(() => test.close());
 
-const asks = async (what: string, body: object, who: Person = owner, status = 200) =>
-  (await as(test, who).post(`${place.setPath}/${what}`).send(body).expect(status)).body;
+const asks = async (what: string, body: object, who: Person = owner, status = 200, { setPath } = place) =>
+  (await as(test, who).post(`${setPath}/${what}`).send(body).expect(status)).body;
+/** Another set of the production, as far as it is to be. */
+async function setWith(name: string, changed: SetDocument): Promise<SetPlace & { number: number }> {
+  const made = await createSet(test, place, { name });
+  const draft = (await as(test, owner).get(`${made.setPath}/draft`).expect(200)).body;
+  const sent = { baseNumber: draft.number, document: changed };
+  const saved = await as(test, owner).put(`${made.setPath}/draft`).send(sent).expect(200);
+  return { ...made, number: saved.body.number };
+}
 const plain = (value: unknown): unknown => JSON.parse(JSON.stringify(value));
 const height = (): Dimension => dimensionOf(document, 'seat-height')!;
 
@@ -286,7 +296,13 @@ describe('a map of two dimensions', () => {
   const asked = { across: 'seat-height', up: 'seat-depth' };
 
   it('says what the library says, and the share of the same people', async () => {
-    const [across, up] = [height(), dimensionOf(document, 'seat-depth')!];
+    // Hundreds of sets are tried: of one bench, so that each is quick.
+    const one = {
+      ...document,
+      pieces: document.pieces.filter(({ id }) => id === document.seating[0]!.pieceId),
+    };
+    const at = await setWith('One bench', one);
+    const [across, up] = [dimensionOf(one, 'seat-height')!, dimensionOf(one, 'seat-depth')!];
     const expected = finished(
       castMap({
         across: gridValues(across, 1),
@@ -296,7 +312,8 @@ describe('a map of two dimensions', () => {
         shown: new Set([across.ruleId, up.ruleId]),
       }),
     );
-    const body = await asks('draft/dimension-map', { ...asked, populationId: 'us-civilians-2015' });
+    const crowd = { populationId: 'us-civilians-2015' };
+    const body = await asks('draft/dimension-map', { ...asked, ...crowd }, owner, 200, at);
     expect(body.acrossValues).toEqual(expected.across);
     expect(body.upValues).toEqual(expected.up);
     expect(body.regions).toEqual(plain(expected.regions));
@@ -342,15 +359,12 @@ describe('a map of two dimensions', () => {
 
 describe('a comparison', () => {
   it('says what changed, who gains and who loses, to each as the sheets do', async () => {
-    const other = await createSet(test, place, { name: 'Other way' });
-    const draft = (await as(test, owner).get(`${other.setPath}/draft`).expect(200)).body;
     const lowered = height().at(height().value - 50)!;
-    const sent = { baseNumber: draft.number, document: lowered };
-    await as(test, owner).put(`${other.setPath}/draft`).send(sent).expect(200);
+    const other = await setWith('Other way', lowered);
     const body = await asks('comparison', { from: { revisionLetter: 'a' }, to: { setId: other.setId } });
     const expected = compareSheets(check(document), check(lowered));
     expect(body.from).toMatchObject({ revisionLetter: 'A', setId: place.setId });
-    expect(body.to).toMatchObject({ draftNumber: draft.number + 1, setName: 'Other way' });
+    expect(body.to).toMatchObject({ draftNumber: other.number, setName: 'Other way' });
     expect(body.changes.length).toBeGreaterThan(0);
     const turned = (list: { ruleId: string; from: string; to: string }[]) =>
       list.map(({ ruleId, from, to }) => ({ ruleId, from, to }));
