@@ -26,7 +26,8 @@ const HEAD = 'sticky top-0 border-b border-ink bg-(--ground) py-2 font-normal wh
 /** Its scrollbar shows whether or not the system hides those at rest. */
 const SCROLLER =
   '@container relative min-h-0 overflow-x-scroll overflow-y-auto [scrollbar-gutter:stable] ' +
-  '[scrollbar-color:auto] [&::-webkit-scrollbar]:size-2.5 [&::-webkit-scrollbar-thumb]:bg-rule-strong';
+  '[scrollbar-color:auto] [&::-webkit-scrollbar]:size-2.5 ' +
+  '[&::-webkit-scrollbar-corner]:bg-transparent [&::-webkit-scrollbar-thumb]:bg-rule-strong';
 const FROZEN = 'sticky left-0 bg-(--ground) pr-3 text-left whitespace-nowrap';
 
 /** Sitters by checks. Arrow keys move between cells, Enter opens one, Escape closes it. */
