@@ -110,3 +110,6 @@ export { suggestDimensions } from './choices/suggest-dimensions.ts';
 export type { Answer, AnswerKind, Blame, Suggestion } from './choices/suggest-dimensions.ts';
 export { findWaysIn, type Comer, type WaysIn } from './ways-in/find-ways-in.ts';
 export type { Move, TightSpot, WayIn, WayStep } from './ways-in/way-in.ts';
+export { wheelchairFloor, type FloorKind, type FloorShape } from './ways-in/wheelchair-floor.ts';
+export { bandOutline } from './ways-in/bodies.ts';
+export { standing } from './ways-in/walker.ts';
