@@ -114,7 +114,7 @@ export class FitCheckService {
         next = nextMeasures({
           person: sitter.person,
           model,
-          rowFor: (person) => checkSitter(input, { ...sitter, person }),
+          rowFor: (person, ruleIds) => checkSitter(input, { ...sitter, person }, ruleIds),
           confidence: confidence ?? ruleBook.confidence,
         });
         this.recent.set(key, next);

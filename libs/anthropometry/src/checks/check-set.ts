@@ -55,24 +55,30 @@ export function checkSet(input: CheckInput): FitSheet {
  *
  * @param input - as for `checkSet`
  * @param sitter - whoever is asked about; the sitters of the input do not matter
- * @returns the row that `checkSet` would make of this sitter
+ * @param ruleIds - rules to ask; every rule of a person when absent
+ * @returns the row that `checkSet` would make of this sitter, with the cells of those rules
  * @throws RangeError as `checkSet`
  */
-export function checkSitter(input: Omit<CheckInput, 'sitters'>, sitter: Sitter): SitterRow {
+export function checkSitter(
+  input: Omit<CheckInput, 'sitters'>,
+  sitter: Sitter,
+  ruleIds?: readonly string[],
+): SitterRow {
   const place = input.situation.places.find(({ placeId }) => placeId === sitter.placeId);
-  return rowOf(input, sitter, place);
+  return rowOf(input, sitter, place, ruleIds && PERSON_CHECKS.filter(({ id }) => ruleIds.includes(id)));
 }
 
 function rowOf(
   input: Omit<CheckInput, 'sitters'>,
   sitter: Sitter,
   place: PlaceSituation | undefined,
+  checks = PERSON_CHECKS,
 ): SitterRow {
   const { ruleBook, model, settings } = input;
   const { lensHeightMm } = settings;
   const body = model.predict(sitter.person);
   const sink = sinkUnder(place?.foam, body);
-  const cells = PERSON_CHECKS.map((check): FitCell => {
+  const cells = checks.map((check): FitCell => {
     const rule = ruleBook.rule(check.id);
     const placed: Answered = place
       ? answered(

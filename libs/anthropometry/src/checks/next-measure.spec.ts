@@ -19,7 +19,7 @@ const TOLD: KnownPerson = {
 
 const rowAt =
   (at: PlaceSituation) =>
-  (person: KnownPerson): SitterRow =>
+  (person: KnownPerson, ruleIds?: readonly string[]): SitterRow =>
     checkSitter(
       {
         situation: set({ places: [at] }),
@@ -28,6 +28,7 @@ const rowAt =
         settings: { backPosture: 'dining', trafficBehind: 'none' },
       },
       { id: 's', name: 'S', kind: 'cast', placeId: at.placeId, person },
+      ruleIds,
     );
 
 const next = (at: PlaceSituation, person: KnownPerson) =>
@@ -51,6 +52,22 @@ describe('which tape measure next', () => {
     expect(first.settles).toBeLessThanOrEqual(uncertain.length);
     const total = order.reduce((sum, { settles }) => sum + settles, 0);
     expect(total).toBeLessThanOrEqual(uncertain.length + 1e-9);
+  });
+
+  it('asks only the uncertain rules again, and answers as if it asked all', () => {
+    const at = place({ table: lapTable({ undersideMm: 407 + 160, topMm: 407 + 190 }) });
+    const cells: number[] = [];
+    const rowFor = (person: KnownPerson, ruleIds?: readonly string[]) => {
+      const row = rowAt(at)(person, ruleIds);
+      cells.push(row.cells.length);
+      return row;
+    };
+    const found = nextMeasures({ person: TOLD, model, rowFor, confidence: CONFIDENCE });
+    const whole = (person: KnownPerson) => rowAt(at)(person);
+    expect(found).toEqual(nextMeasures({ person: TOLD, model, rowFor: whole, confidence: CONFIDENCE }));
+    expect(found.order.length).toBeGreaterThan(0);
+    expect(new Set(cells.slice(1))).toEqual(new Set([found.uncertain.length]));
+    expect(cells[0]).toBeGreaterThan(found.uncertain.length);
   });
 
   it('never does worse than any other single measurement', () => {

@@ -47,14 +47,14 @@ export function isUncertainCell({ outcome }: FitCell, confidence: number): boole
  * values it may have, given all that is known, the person's checks are made again and the verdicts that became sure
  * are counted.
  *
- * @param input - the person; the body model; the person's row of the fit sheet for whatever is known of them; and the
- *   probability a verdict asks for
+ * @param input - the person; the body model; the person's row of the fit sheet for whatever is known of them, which
+ *   may leave out other rules than those named; and the probability a verdict asks for
  * @returns the uncertain rules, and at most two measurements in the order to take them
  */
 export function nextMeasures(input: {
   person: KnownPerson;
   model: BodyModel;
-  rowFor: (person: KnownPerson) => SitterRow;
+  rowFor: (person: KnownPerson, ruleIds?: readonly string[]) => SitterRow;
   confidence: number;
 }): NextMeasures {
   const { person, confidence, rowFor } = input;
@@ -106,7 +106,7 @@ type Input = Parameters<typeof nextMeasures>[0];
 function settledShares(input: Input, people: readonly KnownPerson[], ruleIds: readonly string[]): number[] {
   const counts = ruleIds.map(() => 0);
   for (const person of people) {
-    const cells = new Map(input.rowFor(person).cells.map((cell) => [cell.ruleId, cell]));
+    const cells = new Map(input.rowFor(person, ruleIds).cells.map((cell) => [cell.ruleId, cell]));
     for (const [i, ruleId] of ruleIds.entries()) {
       const cell = cells.get(ruleId);
       if (cell && !isUncertainCell(cell, input.confidence)) counts[i] = (counts[i] as number) + 1;

@@ -31,7 +31,8 @@ export function answerNext(question: NextQuestion, model: BodyModel): NextMeasur
   return nextMeasures({
     person: sitter.person,
     model,
-    rowFor: (person) => checkSitter({ situation, ruleBook, model, settings }, { ...sitter, person }),
+    rowFor: (person, ruleIds) =>
+      checkSitter({ situation, ruleBook, model, settings }, { ...sitter, person }, ruleIds),
     confidence,
   });
 }
