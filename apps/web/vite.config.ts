@@ -19,7 +19,7 @@ export default defineConfig({
     sourcemap: false,
     rolldownOptions: {
       output: {
-        codeSplitting: { groups: [{ name: 'three', test: /node_modules[\\/]three[\\/]/ }] },
+        codeSplitting: { groups: [{ name: 'three', test: /node_modules[\\/]three[\\/](?!examples)/ }] },
       },
     },
   },

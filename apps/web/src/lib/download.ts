@@ -8,6 +8,11 @@ export async function download(
   body?: unknown,
 ): Promise<void> {
   const { blob, name } = await api.file(path, { query, body });
+  keepFile(blob, name);
+}
+
+/** Hands a file made here to the browser to keep. */
+export function keepFile(blob: Blob, name: string): void {
   const url = URL.createObjectURL(blob);
   const link = document.createElement('a');
   link.href = url;

@@ -2,6 +2,7 @@ import font300 from '@fontsource/work-sans/files/work-sans-latin-300-normal.woff
 import font400 from '@fontsource/work-sans/files/work-sans-latin-400-normal.woff2?url';
 import font500 from '@fontsource/work-sans/files/work-sans-latin-500-normal.woff2?url';
 import font600 from '@fontsource/work-sans/files/work-sans-latin-600-normal.woff2?url';
+import { keepFile } from '@/lib/download.ts';
 
 /** What stands around a drawing that leaves the page. */
 export interface PictureWords {
@@ -119,10 +120,5 @@ function loaded(file: Blob): Promise<HTMLImageElement> {
 export async function keepPng(canvas: HTMLCanvasElement, name: string): Promise<void> {
   const file = await new Promise<Blob | null>((resolve) => canvas.toBlob(resolve, 'image/png'));
   if (!file) throw new Error('The picture could not be drawn.');
-  const address = URL.createObjectURL(file);
-  const link = document.createElement('a');
-  link.href = address;
-  link.download = `${name}.png`;
-  link.click();
-  setTimeout(() => URL.revokeObjectURL(address), 30_000);
+  keepFile(file, `${name}.png`);
 }

@@ -3,6 +3,7 @@ import { useMemo, useState, type ReactNode } from 'react';
 import { useStore } from 'zustand';
 import { Button } from '@/components/button.tsx';
 import type { SetInfo } from '../api.ts';
+import { SaveDrawingButton } from '../export/save-drawing-button.tsx';
 import { useRoomAddress } from '../hooks/use-address.ts';
 import { useChoosing } from '../hooks/use-choosing.ts';
 import { useGroupActions } from '../hooks/use-group-actions.ts';
@@ -12,6 +13,7 @@ import { useSavedCell } from '../hooks/use-saved-cell.ts';
 import { useShortcuts, type ShortcutActions } from '../hooks/use-shortcuts.ts';
 import { RoomContext, useAutosave, usePicture, useSurroundings } from '../room-context.tsx';
 import { useRoomStore, useUndo } from '../store.ts';
+import { WaysPanel } from '../ways/ways-panel.tsx';
 import { ChosenPieces } from './chosen-pieces.tsx';
 import { ConflictScreen } from './conflict-screen.tsx';
 import { DraftRefused } from './draft-refused.tsx';
@@ -126,10 +128,12 @@ export function RoomDesk({ lastRevision, foot, aboutPiece }: Props) {
               aboutPiece={aboutPiece}
             />
             {!empty && <KeyPlan picture={picture} address={address} />}
+            {!empty && !clientView && <WaysPanel />}
             <KnownDifferences document={document} onReplace={actions.replace} />
             {mayChange && !empty && <IssueRevision sheet={picture.sheet} lastLetter={lastRevision?.letter} />}
             {!clientView && <NotesPanel piece={piece} pieces={document.pieces} parts={picture.parts} />}
-            <p>
+            <p className="flex flex-wrap gap-x-5">
+              {!empty && <SaveDrawingButton />}
               <Button look="word" onClick={() => setHelpOpen(true)}>
                 Keys
               </Button>

@@ -1,6 +1,7 @@
 import { Canvas, useFrame, useThree } from '@react-three/fiber';
 import { useEffect, useLayoutEffect, useMemo, useRef } from 'react';
 import { OrthographicCamera } from 'three';
+import { offerStill } from '../export/still';
 import type { RoomPicture } from '../picture';
 import { BodyFigures } from './body-figures';
 import { followView } from './follow-view';
@@ -61,7 +62,7 @@ function Stage({ picture, controller, letter, cut, chosenIds, showBodies, theme,
   const camera = useMemo(() => new OrthographicCamera(), []);
   const shared = useMemo(() => createSharedUniforms(), []);
   const materials = useMemo(() => createMaterials(shared), [shared]);
-  const { invalidate, get, gl } = useThree();
+  const { advance, invalidate, get, gl } = useThree();
   const canvas = gl.domElement;
   // The theme is read from the tokens, which React does not see change.
   const palette = useMemo(() => ({ ...readPalette(canvas), theme }), [canvas, theme]);
@@ -86,6 +87,14 @@ function Stage({ picture, controller, letter, cut, chosenIds, showBodies, theme,
   }, [cut, shared, invalidate]);
 
   useLayoutEffect(() => followView(controller, get), [controller, get]);
+  useEffect(
+    () =>
+      offerStill(() => {
+        advance(performance.now());
+        return canvas;
+      }),
+    [advance, canvas],
+  );
   useEffect(() => invalidate(), [picture, letter, chosenIds, showBodies, invalidate]);
   useEffect(
     () => () => Object.values(materials).forEach((item) => 'dispose' in item && item.dispose()),

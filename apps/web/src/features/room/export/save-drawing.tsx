@@ -1,0 +1,216 @@
+import {
+  scaleWords,
+  shopScales,
+  type LengthStyle,
+  type SetView,
+  type ViewDirection,
+} from '@settlewright/geometry';
+import { dxfOf, setDrawing, svgOf } from '@settlewright/geometry/export';
+import { useMemo, useState } from 'react';
+import { Button } from '@/components/button.tsx';
+import { Dialog } from '@/components/dialog.tsx';
+import { LengthField } from '@/components/length-field.tsx';
+import { Notice } from '@/components/notice.tsx';
+import { entryOf, type QuantityEntry } from '@/components/quantity-entry.ts';
+import { Select } from '@/components/select.tsx';
+import { announce } from '@/lib/announce.ts';
+import { keepFile } from '@/lib/download.ts';
+import { Toggle } from '../components/toggle.tsx';
+import { usePicture, useSurroundings } from '../room-context.tsx';
+import { readPalette } from '../scene/palette.ts';
+import { freeSpace, pdfOf, sheetsOf, type PaperKey } from './pdf-sheets.ts';
+import { loadSheetFonts } from './sheet-fonts.ts';
+import { takeStill } from './still.ts';
+import { CUT_WORDS, fileName, usualCut, usualScale, VIEW_CHOICES } from './views-to-save.ts';
+
+const FILES = [
+  { value: 'pdf', words: 'PDF to print, to scale' },
+  { value: 'svg', words: 'SVG picture, to scale' },
+  { value: 'dxf', words: 'DXF for drawing programs, full size' },
+  { value: 'png', words: 'PNG picture of the scene' },
+  { value: 'glb', words: 'glTF model of the pieces' },
+] as const;
+type FileKind = (typeof FILES)[number]['value'];
+
+const TYPES: Record<FileKind, string> = {
+  pdf: 'application/pdf',
+  svg: 'image/svg+xml',
+  dxf: 'image/vnd.dxf',
+  png: 'image/png',
+  glb: 'model/gltf-binary',
+};
+const FARTHEST_MM = 50_000;
+const PAPER_CHOICES = [
+  { value: 'letter', words: 'Letter' },
+  { value: 'a4', words: 'A4' },
+] as const;
+
+const scalesOf = (system: LengthStyle['system']) =>
+  shopScales(system)
+    .filter((scale) => scale <= 200)
+    .map((value) => ({ value, words: scaleWords(system, value) }));
+
+/** Saves a plan, an elevation, a section, the scene or its model as a file; all of it is made in the browser. */
+export default function SaveDrawing({ onClose }: { onClose: () => void }) {
+  const { setName, style } = useSurroundings();
+  const { document: set, parts } = usePicture();
+  const [kind, setKind] = useState<FileKind>('pdf');
+  const [direction, setDirection] = useState<ViewDirection>('above');
+  const [isCut, setIsCut] = useState(false);
+  const [cut, setCut] = useState<QuantityEntry>(() => entryOf(usualCut(set, 'above')));
+  const [dashed, setDashed] = useState(false);
+  const [scale, setScale] = useState(() => usualScale(style.system));
+  const [paper, setPaper] = useState<PaperKey>(style.system === 'millimetres' ? 'a4' : 'letter');
+  const [busy, setBusy] = useState(false);
+  const [problem, setProblem] = useState<string | null>(null);
+
+  const isDrawing = kind !== 'png' && kind !== 'glb';
+  const sectionMm = isCut ? (cut.value ?? undefined) : undefined;
+  const view = useMemo(
+    (): SetView => ({ direction, sectionMm, hidden: dashed ? 'dashed' : 'left-out', scale }),
+    [direction, sectionMm, dashed, scale],
+  );
+  const drawing = useMemo(() => setDrawing(set, view, style), [set, view, style]);
+  const title = `${setName}: ${drawing.title}`;
+  const preview = useMemo(
+    () => `data:image/svg+xml,${encodeURIComponent(svgOf(drawing, title))}`,
+    [drawing, title],
+  );
+  const sheets = kind === 'pdf' ? sheetsOf(drawing, paper).length : 0;
+
+  async function contents(): Promise<BlobPart> {
+    switch (kind) {
+      case 'svg':
+        return svgOf(drawing, title);
+      case 'dxf':
+        return dxfOf(drawing, style.system === 'millimetres' ? 'millimetres' : 'inches');
+      case 'pdf': {
+        const version = `Draft, ${new Date().toLocaleDateString('en-GB', { dateStyle: 'long' })}`;
+        return pdfOf(drawing, { setName, version, style }, paper, await loadSheetFonts());
+      }
+      case 'png': {
+        const still = await takeStill(getComputedStyle(document.body).backgroundColor);
+        if (!still) throw new Error('The scene is not drawn at the moment, so there is no picture of it.');
+        return still;
+      }
+      case 'glb': {
+        const { glbOf } = await import('./scene-glb.ts');
+        return glbOf(set, parts, readPalette(document.documentElement).tones, setName);
+      }
+    }
+  }
+
+  async function save() {
+    setBusy(true);
+    setProblem(null);
+    try {
+      const name = isDrawing
+        ? fileName(setName, view, kind)
+        : fileName(setName, { ...view, direction: 'front', sectionMm: undefined }, kind).replace(
+            '-front.',
+            '.',
+          );
+      keepFile(new Blob([await contents()], { type: TYPES[kind] }), name);
+      announce(`${name} is saved.`);
+    } catch (error) {
+      setProblem(error instanceof Error ? error.message : 'The file could not be made.');
+    } finally {
+      setBusy(false);
+    }
+  }
+
+  return (
+    <Dialog
+      open
+      wide
+      onClose={onClose}
+      title="Save a drawing"
+      describe="Made here in the browser, from the boards and cushions of the pieces. Nothing in it shows who sits."
+    >
+      {problem && (
+        <Notice tone="wont" className="mb-5">
+          {problem}
+        </Notice>
+      )}
+      <div className="grid gap-x-8 gap-y-5 tablet:grid-cols-[17rem_minmax(0,1fr)]">
+        <div className="grid content-start gap-4">
+          <Select label="File" value={kind} options={FILES} onChange={setKind} />
+          {isDrawing && (
+            <>
+              <Select
+                label="View"
+                value={direction}
+                options={VIEW_CHOICES}
+                onChange={(next) => {
+                  setDirection(next);
+                  setCut(entryOf(usualCut(set, next)));
+                }}
+              />
+              <div className="flex flex-wrap gap-x-4">
+                <Toggle on={isCut} onChange={setIsCut}>
+                  Cut the set
+                </Toggle>
+                <Toggle on={dashed} onChange={setDashed}>
+                  Dash what is hidden
+                </Toggle>
+              </div>
+              {isCut && (
+                <LengthField
+                  label={CUT_WORDS[direction]}
+                  entry={cut}
+                  onChange={setCut}
+                  minMm={direction === 'above' ? 0 : -FARTHEST_MM}
+                  maxMm={FARTHEST_MM}
+                />
+              )}
+              <Select
+                label={kind === 'dxf' ? 'Words laid out for the scale' : 'Scale'}
+                value={scale}
+                options={scalesOf(style.system)}
+                onChange={setScale}
+              />
+            </>
+          )}
+          {kind === 'pdf' && (
+            <Select label="Paper" value={paper} options={PAPER_CHOICES} onChange={setPaper} />
+          )}
+          <p className="text-sm text-ink-2" role="status">
+            {kind === 'pdf' && sheetWords(sheets, paper)}
+            {kind === 'dxf' && `Full size, in ${style.system === 'millimetres' ? 'millimetres' : 'inches'}.`}
+            {kind === 'png' && 'The scene as it stands on the screen, without tapes and names.'}
+            {kind === 'glb' && 'In metres, without bodies.'}
+          </p>
+          <div className="flex flex-wrap gap-3">
+            <Button
+              look="main"
+              busy={busy}
+              busyWords="Drawing"
+              disabled={isDrawing && isCut && (cut.problem !== undefined || cut.value === null)}
+              onClick={() => void save()}
+            >
+              Save
+            </Button>
+            <Button onClick={onClose}>Close</Button>
+          </div>
+        </div>
+        {isDrawing && (
+          <img
+            src={preview}
+            alt={`${title}. ${drawing.words
+              .filter(({ layer }) => layer === 'dimension')
+              .map(({ text }) => text)
+              .join(', ')}.`}
+            className="max-h-[32rem] w-full self-start bg-white object-contain max-tablet:order-first max-tablet:max-h-64"
+          />
+        )}
+      </div>
+    </Dialog>
+  );
+}
+
+function sheetWords(sheets: number, paper: PaperKey): string {
+  const { widthMm, heightMm } = freeSpace(paper);
+  const name = paper === 'a4' ? 'A4' : 'Letter';
+  if (sheets === 1) return `One sheet of ${name}.`;
+  return `${sheets} sheets of ${name}, each showing ${Math.round(widthMm)} by ${Math.round(heightMm)} mm of paper. The scale is kept; they overlap for joining.`;
+}
