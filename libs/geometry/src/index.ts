@@ -44,6 +44,12 @@ export {
   type SeatPosture,
 } from './mannequin/pose.ts';
 export type { MannequinSegment, MannequinTag } from './mannequin/segments.ts';
+export type { PostureChoice } from './room/posture-choice.ts';
+export * from './mannequin/joint-angles.ts';
+export * from './mannequin/joint-ranges.ts';
+export { footRailOf } from './mannequin/foot-rail.ts';
+export type { FootRail } from './mannequin/leg-posture.ts';
+export * from './distance/joint-envelopes.ts';
 export { gapBetween, type Gap } from './distance/gap.ts';
 export { partShape, segmentShape } from './distance/solids.ts';
 export type { Shape } from './distance/shape.ts';

@@ -104,6 +104,18 @@ export function hull(corners: readonly Vec3[]): Shape {
 }
 
 /**
+ * The smallest convex solid around balls of one size: what a joint sweeps.
+ *
+ * @param centres - at least one, millimetres
+ * @param radiusMm - of every ball
+ */
+export const hullOfBalls = (centres: readonly Vec3[], radiusMm: number): Shape => ({
+  ...hull(centres),
+  ...boundsOf(centres.map((centre) => [centre, radiusMm])),
+  marginMm: radiusMm,
+});
+
+/**
  * A round bar with flat ends.
  *
  * @param centre - its middle, millimetres

@@ -9,8 +9,9 @@ import { mix, mixPoints } from './vector.ts';
 export interface Rest {
   /** Height of its top over the pressed seat. */
   topMm: number;
-  /** Its near edge, forward of the rearmost buttock. */
+  /** Its near edge, forward of the rearmost buttock; sideways from the midline where `axis` is 0. */
   edgeMm: number;
+  axis?: 0;
 }
 
 /** What an arm must keep clear of, worked out once for a body. */
@@ -62,12 +63,15 @@ export function overlap(elbow: Vec3, wrist: Vec3, among: Obstacles): number {
     look(p, r);
     if (!rest) most = Math.max(most, thighTop(p[0], p[2]) + 0.9 * r - p[1]);
   }
-  if (rest && elbow[2] < rest.edgeMm && wrist[2] > rest.edgeMm) {
-    const t = (rest.edgeMm - elbow[2]) / (wrist[2] - elbow[2]);
+  const across = rest?.axis ?? 2;
+  if (rest && elbow[across] < rest.edgeMm && wrist[across] > rest.edgeMm) {
+    const t = (rest.edgeMm - elbow[across]) / (wrist[across] - elbow[across]);
     most = Math.max(
       most,
       rest.topMm - mix(elbow[1], wrist[1], t) + 0.95 * mix(radius.forearm, radius.wrist, t),
     );
+  } else if (rest?.axis === 0 && elbow[0] >= rest.edgeMm) {
+    most = Math.max(most, rest.topMm - elbow[1] + 0.95 * radius.elbow);
   }
   return most / BAD_MM;
 }

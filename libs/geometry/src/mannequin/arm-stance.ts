@@ -3,9 +3,17 @@ import type { Figure } from './figure.ts';
 import { reachFor, type Reach } from './limb-reach.ts';
 import { obstacles, overlap, type Rest } from './arm-clearance.ts';
 import { thighSurface } from './leg-sections.ts';
-import { armLinks, bendPoint, restKnee, restShoulder, type ArmStance, type TrunkBend } from './stance.ts';
+import {
+  armLinks,
+  bendPoint,
+  measuringStance,
+  restKnee,
+  restShoulder,
+  type ArmStance,
+  type TrunkBend,
+} from './stance.ts';
 import { bellyFront } from './trunk-profile.ts';
-import { along, cross, length, mix, sub, unit } from './vector.ts';
+import { add, along, cross, length, mix, sub, unit } from './vector.ts';
 
 const POLE: Vec3 = [0.15, -0.8, -0.6];
 const SWIVEL_STEP_RAD = 0.1;
@@ -94,4 +102,69 @@ export function armOnTable(f: Figure, bend: TrunkBend, rest: Rest, up: Vec3): Ar
   if (withinReach.length === 0) return undefined;
   const reach = bestReach(f, bend, withinReach, rest);
   return armAt(f, bend, reach, along(along([0, 0, 1], [1, 0, 0], -0.4), up, -0.06), up);
+}
+
+/** Hanging, forearms level: the posture in which elbow rest heights are taken. */
+export function armLevel(f: Figure, bend: TrunkBend): ArmStance {
+  const { shoulder: rest, elbow, wrist, hand, handBack } = measuringStance(f).arms[0];
+  const shoulder = bendPoint(f, bend, rest);
+  const moved = (p: Vec3): Vec3 => add(shoulder, sub(p, rest));
+  return { shoulder, elbow: moved(elbow), wrist: moved(wrist), hand, handBack };
+}
+
+/** A sill on the left, in the body frame: top, near edge sideways from the midline, depth. */
+interface SideRest {
+  topMm: number;
+  nearMm: number;
+  depthMm: number;
+}
+
+/**
+ * The left forearm on a sill beside the seat.
+ *
+ * @returns the arm, or `undefined` when the sill is out of reach, too high or too low to lie on
+ */
+export function armOnSill(f: Figure, bend: TrunkBend, sill: SideRest, up: Vec3): ArmStance | undefined {
+  const shoulder = bendPoint(f, bend, restShoulder(f));
+  if (sill.topMm > shoulder[1] - 40) return undefined;
+  const { upperMm, forearmMm } = armLinks(f);
+  const side = { topMm: sill.topMm, edgeMm: sill.nearMm, axis: 0 as const };
+  const wishes = [25, 60, 95, 130]
+    .filter((out) => out <= sill.depthMm)
+    .flatMap((out, i) =>
+      steps(0, 0.9 * forearmMm + 60, 20).map((ahead): Wish => ({
+        wrist: [sill.nearMm + out, sill.topMm + 0.86 * f.radius.wrist + 2, shoulder[2] + ahead],
+        dislike: 0.1 * i,
+      })),
+    )
+    .filter(({ wrist }) => length(sub(wrist, shoulder)) < 0.985 * (upperMm + forearmMm));
+  if (wishes.length === 0) return undefined;
+  const reach = bestReach(f, bend, wishes, side);
+  // A forearm that hangs over the edge by its wrist alone does not lie on it.
+  if (reach.middle[1] < sill.topMm - 0.5 * upperMm) return undefined;
+  return armAt(f, bend, reach, along(sub(reach.end, reach.middle), up, -0.1 * forearmMm), up);
+}
+
+/** Cup on the table: this far in from its edge, and this high where the hand holds it. */
+const CUP_IN_MM = 150;
+const CUP_GRIP_MM = 45;
+
+/**
+ * A hand at a cup on the table before the shoulder.
+ *
+ * @returns the arm, or `undefined` when the cup is out of reach
+ */
+export function armToCup(f: Figure, bend: TrunkBend, rest: Rest, up: Vec3): ArmStance | undefined {
+  const shoulder = bendPoint(f, bend, restShoulder(f));
+  if (rest.topMm > shoulder[1] - 60 || rest.topMm < 0.5 * f.TC) return undefined;
+  const { upperMm, forearmMm } = armLinks(f);
+  const wishes = [0, 40, 80, 120]
+    .map((further, i): Wish => ({
+      wrist: [0.4 * f.BA, rest.topMm + CUP_GRIP_MM, rest.edgeMm + CUP_IN_MM - 0.55 * f.Ha + further],
+      dislike: 0.1 * i,
+    }))
+    .filter(({ wrist }) => length(sub(wrist, shoulder)) < 0.985 * (upperMm + forearmMm));
+  if (wishes.length === 0) return undefined;
+  const reach = bestReach(f, bend, wishes, rest);
+  return armAt(f, bend, reach, along(along([0, 0, 1], [1, 0, 0], -0.35), up, 0.08), [1, 0.35, 0]);
 }

@@ -5,6 +5,7 @@ import { builds, percentilePeople } from '../../test/survey-like-people.ts';
 import { gapBetween } from '../distance/gap.ts';
 import { hull } from '../distance/shape.ts';
 import { segmentShape } from '../distance/solids.ts';
+import type { PostureChoice } from '../room/posture-choice.ts';
 import { mannequinMesh } from './mesh.ts';
 import { poseMannequin, type MannequinPose, type SeatPosture } from './pose.ts';
 
@@ -24,13 +25,18 @@ type Axis = 0 | 1 | 2;
 const seat = { effectiveDepthMm: 420, seatTiltRad: 0.035, backLeanRad: 0.14, backTopMm: 1000 };
 
 /** A place whose seat is at the crook of the knee with shoes on, and what is beside and before it. */
-function sit(means: Record<MeasureKey, number>, over: Partial<SeatPosture>): MannequinPose {
+function sit(
+  means: Record<MeasureKey, number>,
+  over: Partial<SeatPosture>,
+  choice?: PostureChoice,
+): MannequinPose {
   return poseMannequin({
     means,
     shoeMm: 25,
     frame: { hipMm: [0, means.popliteal_height + 10, 135], facingRad: 0 },
     situation: { ...seat, ...over },
     sinkMm: 0,
+    choice,
   });
 }
 
@@ -110,6 +116,24 @@ describe('the simple solids reach as far as the near mesh in the postures people
       'forearms on a table',
       (means) =>
         sit(means, { table: { ...table, topMm: means.popliteal_height + means.elbow_rest_height + 30 } }),
+    ],
+    [
+      'a forearm on a sill',
+      (means) =>
+        sit(
+          means,
+          {
+            sills: [
+              {
+                side: 'left',
+                topMm: means.popliteal_height + means.elbow_rest_height + 25,
+                centreToEdgeMm: means.forearm_forearm_breadth / 2 - 40,
+                usableDepthMm: 150,
+              },
+            ],
+          },
+          { arms: 'sill-left' },
+        ),
     ],
   ];
   it.each(postures)('%s', (_, pose) => {

@@ -164,7 +164,20 @@ function seatingDifferences(
       label: `Place ${seat.place} of ${mark}`,
     };
     const sitter = (seats: typeof own) => seats.get(where)?.sitter;
-    return compared(named, { base: sitter(was), mine: sitter(own), theirs: sitter(other) }, base !== null);
+    const posture = (seats: typeof own) => seats.get(where)?.posture;
+    return [
+      ...compared(named, { base: sitter(was), mine: sitter(own), theirs: sitter(other) }, base !== null),
+      ...compared(
+        {
+          ...named,
+          id: `posture:${where}`,
+          key: 'posture',
+          label: `Posture at place ${seat.place} of ${mark}`,
+        },
+        { base: posture(was), mine: posture(own), theirs: posture(other) },
+        base !== null,
+      ),
+    ];
   });
 }
 

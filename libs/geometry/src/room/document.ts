@@ -1,5 +1,6 @@
 import { TAPE_MEASURE_KEYS } from '@settlewright/anthropometry';
 import { z } from 'zod';
+import { postureChoiceSchema } from './posture-choice.ts';
 
 /** Number of the document layout; raised with an upgrade in `upgrades.ts`. */
 export const SCHEMA_VERSION = 1;
@@ -182,6 +183,8 @@ export const setDocumentSchema = z.strictObject({
       pieceId: z.string().max(40),
       place: z.number().int().min(1).max(40),
       sitter: sitterRef,
+      /** How the sitter sits, where somebody chose it. */
+      posture: postureChoiceSchema.optional(),
     }),
   ),
   asked: z.strictObject({

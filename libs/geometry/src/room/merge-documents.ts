@@ -4,6 +4,7 @@ import type { Piece, SetDocument, SitterRef } from './document.ts';
 import { freeId, nextMark } from './edit-pieces.ts';
 import { withPath } from './leaves.ts';
 import { readSetDocument, type DocumentFieldError } from './read-document.ts';
+import type { PostureChoice } from './posture-choice.ts';
 import { withoutLostSeats } from './seating.ts';
 
 /** Somebody who has no place in a merged set. */
@@ -83,9 +84,9 @@ function withMine(merged: SetDocument, difference: DocumentDifference): SetDocum
       return withMyPiece(merged, pieceId, difference);
     case 'seating': {
       const place = Number(difference.id.slice(difference.id.lastIndexOf(':') + 1));
-      const others = merged.seating.filter((seat) => !(seat.pieceId === pieceId && seat.place === place));
-      const sitter = mine as SitterRef | undefined;
-      return { ...merged, seating: sitter === undefined ? others : [...others, { pieceId, place, sitter }] };
+      return key === 'posture'
+        ? withMyPosture(merged, pieceId, place, mine as PostureChoice | undefined)
+        : withMySitter(merged, pieceId, place, mine as SitterRef | undefined);
     }
     case 'asked':
       return { ...merged, asked: withPath(merged.asked, key, mine) };
@@ -95,6 +96,33 @@ function withMine(merged: SetDocument, difference: DocumentDifference): SetDocum
       return { ...merged, knownDifferences: written === undefined ? others : [...others, written] };
     }
   }
+}
+
+/** Whoever sits there now; how they sit stays unless that differs as well. */
+function withMySitter(
+  merged: SetDocument,
+  pieceId: string,
+  place: number,
+  sitter: SitterRef | undefined,
+): SetDocument {
+  const isThere = (seat: SetDocument['seating'][number]) => seat.pieceId === pieceId && seat.place === place;
+  const others = merged.seating.filter((seat) => !isThere(seat));
+  const seat = { ...merged.seating.find(isThere), pieceId, place };
+  return { ...merged, seating: sitter === undefined ? others : [...others, { ...seat, sitter }] };
+}
+
+function withMyPosture(
+  merged: SetDocument,
+  pieceId: string,
+  place: number,
+  posture: PostureChoice | undefined,
+): SetDocument {
+  const seating = merged.seating.map((seat) => {
+    if (seat.pieceId !== pieceId || seat.place !== place) return seat;
+    const { pieceId: piece, place: at, sitter } = seat;
+    return { pieceId: piece, place: at, sitter, ...(posture && { posture }) };
+  });
+  return { ...merged, seating };
 }
 
 function withMyPiece(merged: SetDocument, pieceId: string, difference: DocumentDifference): SetDocument {

@@ -1,5 +1,6 @@
 import { placeFrames } from '../pieces/place-frames.ts';
 import type { SetDocument, SitterRef } from './document.ts';
+import type { PostureChoice } from './posture-choice.ts';
 
 /**
  * Sits somebody at a place, or clears it. A person who already sits elsewhere moves.
@@ -23,6 +24,29 @@ export function seatSitter(
   const exists = piece !== undefined && placeFrames(piece, document).some((frame) => frame.place === place);
   if (!exists) return document;
   return { ...document, seating: sitter === null ? others : [...others, { pieceId, place, sitter }] };
+}
+
+/**
+ * Chooses how the sitter of a place sits, or goes back to what the place suggests.
+ *
+ * @param document - the set
+ * @param pieceId - bench or loose seat
+ * @param place - counted from 1; a place where nobody sits changes nothing
+ * @param posture - what is chosen; null for the suggested posture
+ * @returns the new set
+ */
+export function choosePosture(
+  document: SetDocument,
+  pieceId: string,
+  place: number,
+  posture: PostureChoice | null,
+): SetDocument {
+  const seating = document.seating.map((seat) =>
+    seat.pieceId === pieceId && seat.place === place
+      ? { pieceId, place, sitter: seat.sitter, ...(posture && { posture }) }
+      : seat,
+  );
+  return { ...document, seating };
 }
 
 /**

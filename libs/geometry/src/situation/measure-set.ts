@@ -27,7 +27,8 @@ export interface SeatSituation extends Pick<SetSituation, 'places' | 'facing' | 
 }
 
 /**
- * Measures what a set offers to whoever sits. Checks of single sitters read nothing else of the set.
+ * Measures what a set offers to whoever sits. Checks of single sitters read nothing else of the set. It answers for the
+ * posture that each place suggests; a posture somebody chose by hand moves the drawn body, not the checks.
  *
  * @param document - the set
  * @returns lengths in millimetres, angles in radians

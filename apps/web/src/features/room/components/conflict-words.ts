@@ -38,7 +38,10 @@ function isSitter(value: unknown): value is SitterRef {
 export function sayValue(difference: DocumentDifference, side: Side | 'base', words: WordsOf): string {
   const { kind, key = '', pieceId } = difference;
   const value = difference[side];
-  if (value === undefined || value === null) return kind === 'seating' ? 'nobody' : 'none';
+  if (value === undefined || value === null) {
+    if (kind !== 'seating') return 'none';
+    return key === 'posture' ? 'as the place suggests' : 'nobody';
+  }
   if (kind === 'piece') return 'kept';
   if (kind === 'known-difference') return (value as SetDocument['knownDifferences'][number]).text;
   if (kind === 'seating' && isSitter(value)) return sitterName(value, words.cast);

@@ -1,7 +1,7 @@
 import { formatLength, type LengthStyle, type PoseNote, type SetDocument } from '@settlewright/geometry';
 import type { SeatedBody } from '../picture.ts';
 
-function sayNote({ kind, valueMm = 0 }: PoseNote, style: LengthStyle): string {
+function sayNote({ kind, valueMm = 0, side = 'left' }: PoseNote, style: LengthStyle): string {
   const size = formatLength(valueMm, style);
   switch (kind) {
     case 'feet-hang':
@@ -14,6 +14,26 @@ function sayNote({ kind, valueMm = 0 }: PoseNote, style: LengthStyle): string {
       return 'forearms on the table';
     case 'hands-on-lap':
       return 'hands on the lap';
+    case 'feet-on-rail':
+      return 'feet on the rail';
+    case 'rail-out-of-reach':
+      return 'no rail in reach of the feet';
+    case 'sits-upright':
+      return 'sits upright, off the back';
+    case 'slumps':
+      return 'slumps';
+    case 'forearms-level':
+      return 'arms hanging, forearms level';
+    case 'hand-to-cup':
+      return 'right hand at a cup';
+    case 'table-out-of-reach':
+      return 'no table in reach';
+    case 'forearm-on-sill':
+      return `${side} forearm on the sill`;
+    case 'sill-out-of-reach':
+      return `no sill in reach on the ${side}`;
+    case 'not-as-checked':
+      return 'posture chosen by hand; the checks are for the usual one';
   }
 }
 

@@ -1,0 +1,101 @@
+import { describe, expect, it } from 'vitest';
+import { percentilePeople } from '../../test/survey-like-people.ts';
+import { poseMannequin, type MannequinPose, type SeatPosture } from './pose.ts';
+import type { PostureChoice } from '../room/posture-choice.ts';
+
+const [, woman] = percentilePeople([50])[0]!;
+const SHOE_MM = 25;
+const seatMm = woman.popliteal_height + SHOE_MM;
+const situation: SeatPosture = {
+  effectiveDepthMm: 400,
+  seatTiltRad: 0,
+  backLeanRad: 0.15,
+  backTopMm: 1000,
+  table: { topMm: seatMm + woman.elbow_rest_height + 30, overlapMm: 60 },
+};
+function sit(choice: PostureChoice | undefined, over: Partial<SeatPosture> = {}, liftMm = 0): MannequinPose {
+  return poseMannequin({
+    means: woman,
+    shoeMm: SHOE_MM,
+    frame: { hipMm: [0, seatMm + liftMm, 135], facingRad: 0 },
+    situation: { ...situation, ...over },
+    sinkMm: 0,
+    choice,
+  });
+}
+const kinds = (pose: MannequinPose) => pose.notes.map(({ kind }) => kind);
+
+describe('a posture that somebody chose', () => {
+  it('is the usual one when nothing is chosen, and says so when something is', () => {
+    expect(kinds(sit(undefined))).toEqual(['forearms-on-table']);
+    expect(kinds(sit({}))).toEqual(['forearms-on-table']);
+    expect(kinds(sit({ arms: 'lap' }))).toEqual(['hands-on-lap', 'not-as-checked']);
+  });
+
+  it('sits upright off a leaning back, or slumps by 40 mm', () => {
+    const back = sit({ arms: 'lap' });
+    const upright = sit({ arms: 'lap', trunk: 'upright' });
+    expect(upright.joints.leftShoulder[2]).toBeGreaterThan(back.joints.leftShoulder[2] + 40);
+    expect(kinds(upright)).toContain('sits-upright');
+    const slumped = sit({ arms: 'lap', trunk: 'slumped' });
+    expect(Math.abs(back.eyeMm - slumped.eyeMm - 40)).toBeLessThan(4);
+    expect(kinds(slumped)).toContain('slumps');
+  });
+
+  it('moves with the nudge and no further', () => {
+    const [from, to] = [sit({ arms: 'lap' }), sit({ arms: 'lap', nudge: { leftMm: 40, aheadMm: -25 } })];
+    for (const joint of ['pelvis', 'leftKnee', 'eye'] as const) {
+      expect(to.joints[joint][0] - from.joints[joint][0]).toBeCloseTo(40, 6);
+      expect(to.joints[joint][2] - from.joints[joint][2]).toBeCloseTo(-25, 6);
+    }
+  });
+
+  it('has one forearm on a sill in reach: wrist on it and over it, the other arm as before', () => {
+    const topMm = seatMm + woman.elbow_rest_height + 25;
+    const sill = { topMm, centreToEdgeMm: 230, usableDepthMm: 150 };
+    for (const side of ['left', 'right'] as const) {
+      const pose = sit({ arms: `sill-${side}` }, { sills: [{ ...sill, side }] });
+      expect(pose.notes).toContainEqual({ kind: 'forearm-on-sill', side });
+      const wrist = pose.joints[`${side}Wrist`];
+      expect(Math.abs(wrist[0])).toBeGreaterThan(230);
+      expect(Math.abs(wrist[0])).toBeLessThan(230 + 150);
+      expect(wrist[1] - topMm).toBeGreaterThan(10);
+      expect(wrist[1] - topMm).toBeLessThan(45);
+      expect(Math.sign(wrist[0])).toBe(side === 'left' ? 1 : -1);
+      const other = side === 'left' ? 'rightWrist' : 'leftWrist';
+      expect(pose.joints[other]).toEqual(sit(undefined).joints[other]);
+    }
+  });
+
+  it('says when the sill is not there, and leaves the arms as they were', () => {
+    const far = { side: 'left', topMm: seatMm + 240, centreToEdgeMm: 900, usableDepthMm: 150 } as const;
+    const pose = sit({ arms: 'sill-left' }, { sills: [far] });
+    expect(pose.notes).toContainEqual({ kind: 'sill-out-of-reach', side: 'left' });
+    expect(pose.joints.leftWrist).toEqual(sit(undefined).joints.leftWrist);
+  });
+
+  it('has the right hand at a cup over the table, or says that there is none', () => {
+    const pose = sit({ arms: 'cup' });
+    expect(kinds(pose)).toContain('hand-to-cup');
+    expect(pose.joints.rightFingertip[1] - situation.table!.topMm).toBeGreaterThan(20);
+    expect(pose.joints.rightWrist).not.toEqual(sit(undefined).joints.rightWrist);
+    expect(pose.joints.leftWrist).toEqual(sit(undefined).joints.leftWrist);
+    expect(kinds(sit({ arms: 'cup' }, { table: undefined }))).toContain('table-out-of-reach');
+  });
+
+  it('puts hanging feet on a rail under them, and says when there is none in reach', () => {
+    const high = 180;
+    expect(kinds(sit(undefined, {}, high))).toContain('feet-hang');
+    const footRail = { topMm: high + 20, aheadOfHipMm: 470 };
+    const railed = sit(undefined, { footRail }, high);
+    expect(kinds(railed)).toContain('feet-on-rail');
+    expect(kinds(railed)).not.toContain('feet-hang');
+    expect(railed.joints.leftAnkle[1]).toBeCloseTo(
+      footRail.topMm + SHOE_MM + woman.lateral_malleolus_height,
+      0,
+    );
+    expect(kinds(sit({ feet: 'rail' }, { footRail: { topMm: 30, aheadOfHipMm: 1500 } }, high))).toContain(
+      'rail-out-of-reach',
+    );
+  });
+});

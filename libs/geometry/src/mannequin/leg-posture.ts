@@ -1,0 +1,92 @@
+import type { Vec3 } from '../parts/part.ts';
+import { toRoom, type BodyPlacement } from './body-placement.ts';
+import type { Figure } from './figure.ts';
+import { HIP_FORWARD_MM, HIP_HEIGHT_MM, restAnkle, restKnee } from './stance.ts';
+import { clamp, turnAboutX } from './vector.ts';
+
+const SHIN_FURTHEST_RAD = (28 * Math.PI) / 180;
+const TOES_DOWN_RAD = (18 * Math.PI) / 180;
+
+/** A bar or step for the feet before the seat. */
+export interface FootRail {
+  /** Its top above the floor. */
+  topMm: number;
+  /** Its middle, level and forwards from the hip point of the place. */
+  aheadOfHipMm: number;
+}
+
+/** Bends of the legs, radians, and where the soles are. */
+export interface Legs {
+  thighRad: number;
+  shinRad: number;
+  footRad: number;
+  /** Sole above the floor when the feet hang. */
+  heelGapMm: number;
+  kneesLift: boolean;
+}
+
+const hipAxis: Vec3 = [0, HIP_HEIGHT_MM, HIP_FORWARD_MM];
+const shinOf = (f: Figure): number => restKnee(f)[1] - restAnkle(f)[1];
+
+/** Thighs along the seat, feet on the floor if they reach it: shins forward when the seat is low, hanging when high. */
+export function legsFor(f: Figure, placement: BodyPlacement, shoeMm: number): Legs {
+  const shinMm = shinOf(f);
+  const footMm = f.MH + shoeMm;
+  const kneeHeight = (thighRad: number): number =>
+    toRoom(placement, turnAboutX(restKnee(f), hipAxis, thighRad))[1];
+  const upright = placement.tiltRad;
+  const cosine = (kneeHeight(0) - footMm) / shinMm;
+  if (cosine >= 1) {
+    const gap = kneeHeight(0) - footMm - shinMm;
+    const toes = Math.min(TOES_DOWN_RAD, Math.asin(clamp(gap / (0.72 * f.FL), 0, 1)));
+    return { thighRad: 0, shinRad: upright, footRad: upright + toes, heelGapMm: gap, kneesLift: false };
+  }
+  const shin = Math.acos(clamp(cosine, -1, 1));
+  if (shin <= SHIN_FURTHEST_RAD) {
+    return { thighRad: 0, shinRad: upright - shin, footRad: upright, heelGapMm: 0, kneesLift: false };
+  }
+  let low = 0;
+  let high = Math.PI / 3;
+  for (let i = 0; i < 24; i++) {
+    const middle = (low + high) / 2;
+    if (kneeHeight(-middle) < shinMm * Math.cos(SHIN_FURTHEST_RAD) + footMm) low = middle;
+    else high = middle;
+  }
+  return {
+    thighRad: -(low + high) / 2,
+    shinRad: upright - SHIN_FURTHEST_RAD,
+    footRad: upright,
+    heelGapMm: 0,
+    kneesLift: true,
+  };
+}
+
+/**
+ * Feet on a rail: thighs along the seat, shins forwards or backwards so that the soles lie on it.
+ *
+ * @param hipMm - the hip point of the place, forwards of the body frame's origin
+ * @returns the legs, or `undefined` when the soles do not come to lie on it
+ */
+export function legsOnRail(
+  f: Figure,
+  placement: BodyPlacement,
+  shoeMm: number,
+  rail: FootRail,
+  hipMm: number,
+): Legs | undefined {
+  const upright = placement.tiltRad;
+  const knee = restKnee(f);
+  const level = { ...placement, originMm: [0, placement.originMm[1], 0] as const, facingRad: 0 };
+  const kneeAt = toRoom(level, knee);
+  const cosine = (kneeAt[1] - f.MH - shoeMm - rail.topMm) / shinOf(f);
+  if (cosine > 1 || cosine < Math.cos(SHIN_FURTHEST_RAD)) return undefined;
+  const swing = Math.acos(cosine);
+  const aheadOfOrigin = rail.aheadOfHipMm + hipMm;
+  for (const shin of [-swing, swing]) {
+    const ankle = kneeAt[2] - Math.sin(shin) * shinOf(f);
+    const under = aheadOfOrigin - ankle;
+    if (under < -0.25 * f.FL || under > 0.7 * f.FL) continue;
+    return { thighRad: 0, shinRad: upright + shin, footRad: upright, heelGapMm: 0, kneesLift: false };
+  }
+  return undefined;
+}

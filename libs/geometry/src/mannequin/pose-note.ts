@@ -1,0 +1,22 @@
+/** Something about the pose worth saying; `valueMm` where it has a size. */
+export interface PoseNote {
+  kind:
+    | 'feet-hang'
+    | 'feet-on-rail'
+    | 'rail-out-of-reach'
+    | 'slides-forward'
+    | 'knees-lift'
+    | 'sits-upright'
+    | 'slumps'
+    | 'forearms-on-table'
+    | 'forearms-level'
+    | 'hands-on-lap'
+    | 'hand-to-cup'
+    | 'table-out-of-reach'
+    | 'forearm-on-sill'
+    | 'sill-out-of-reach'
+    /** Something was chosen; the checks answer for the posture without it. */
+    | 'not-as-checked';
+  valueMm?: number;
+  side?: 'left' | 'right';
+}
