@@ -119,6 +119,19 @@ describe('a survey of one’s own', () => {
     await page.reload();
     await million().getByText('The set as it stands.').waitFor({ timeout: 90_000 });
     expect(await million().textContent()).toContain(`1,000,000 people: ${name}`);
+  });
+
+  it('says what stays before it is removed, and is told as removed afterwards', async () => {
+    const address = page.url();
+    await page.getByRole('button', { name: 'Your own surveys: 1' }).click();
+    await page.getByRole('button', { name: `Remove ${name}` }).click();
+    const dialog = page.getByRole('dialog', { name: `Remove ${name}?` });
+    await dialog.getByText(/^Night train, .*: 1 count$/).waitFor();
+    await expectAccessible(page);
+    await dialog.getByRole('button', { name: 'Remove' }).click();
+    await million().getByText('a survey that was removed since').waitFor({ timeout: 60_000 });
+    await page.goto(address);
+    await page.getByText(/^This survey was removed from the workshop\./).waitFor();
     expect(complaints).toEqual([]);
   });
 });
