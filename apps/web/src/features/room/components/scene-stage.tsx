@@ -15,6 +15,7 @@ import type { RoomPicture } from '../picture.ts';
 import { useSurroundings } from '../room-context.tsx';
 import { isBehind, isToScale, VIEW_TITLES } from '../scene/views.ts';
 import { useRoom } from '../store.ts';
+import { WayOnScene } from '../ways/way-on-scene.tsx';
 import { EyeMark } from './eye-mark.tsx';
 import { SceneErrorBoundary } from './scene-error-boundary.tsx';
 import { ScaleBar } from './scale-bar.tsx';
@@ -187,6 +188,7 @@ export function SceneStage({ picture, piece, address, actions, several, onOpenCe
           onSelectPiece={address.select}
           onOpenCell={onOpenCell}
         />
+        <WayOnScene controller={view.controller} style={style} />
         <div
           ref={readOut}
           hidden

@@ -1,0 +1,46 @@
+import type { TightSpot, WayIn } from '@settlewright/geometry';
+import { joinWords } from '../choosing-words.ts';
+
+/** How lengths and people are called. */
+export interface Naming {
+  length: (mm: number) => string;
+  /** Who sits at a place. */
+  name: (placeId: string) => string;
+}
+
+const AT: Record<TightSpot['band'], string> = {
+  thighs: 'at the thighs',
+  trunk: 'at the trunk',
+  shins: 'at the shins',
+};
+
+const where = ({ between, band, move }: TightSpot): string => {
+  const marks = [...new Set(between.map(({ mark }) => mark))];
+  const at = marks.length > 1 ? `between ${joinWords(marks)}` : `at ${joinWords(marks)}`;
+  return `${at}, ${AT[band]}${move === 'slide' ? ', sliding along the seat' : ''}`;
+};
+
+/** What a way in comes to, in a sentence or two. */
+export function sayWay({ steps, tightest, passes, placeId }: WayIn, { length, name }: Naming): string {
+  const who = name(placeId);
+  if (steps.length === 0) return `No way leads to the place of ${who}, however thin one is.`;
+  if (tightest === undefined) return `${who} gets in with room to spare on both sides.`;
+  const { widthMm, depthMm, clearMm } = tightest;
+  const sizes = `${length(widthMm)} wide for a body ${length(depthMm)} deep`;
+  if (passes) {
+    return `${who} gets in. Tightest ${where(tightest)}: ${sizes}, ${length(clearMm)} to spare on each side.`;
+  }
+  return `${who} is stuck ${where(tightest)}: ${sizes}. The deepest person who passes is ${length(Math.max(0, depthMm + 2 * clearMm))}.`;
+}
+
+/** What others have to do for it. */
+export function sayHelp({ past, chairs }: WayIn, { name }: Naming): string[] {
+  const of = (how: WayIn['past'][number]['how']) =>
+    past.filter((one) => one.how === how).map(({ placeId }) => name(placeId));
+  const [later, up] = [of('sits-later'), of('stands-up')];
+  return [
+    ...(later.length > 0 ? [`Goes in before ${joinWords(later)}.`] : []),
+    ...(up.length > 0 ? [`Past ${joinWords(up)} once seated only where they stand up.`] : []),
+    ...(chairs.length > 0 ? [`Take ${joinWords(chairs.map(({ mark }) => mark))} out of the way.`] : []),
+  ];
+}

@@ -1,0 +1,143 @@
+import { formatLength, wheelchairFloor, type SetDocument } from '@settlewright/geometry';
+import { useEffect, useMemo, useState } from 'react';
+import { Button } from '@/components/button.tsx';
+import { RuleHeading } from '@/components/rule-heading.tsx';
+import { Select } from '@/components/select.tsx';
+import { useSurroundings } from '../room-context.tsx';
+import { useRoom } from '../store.ts';
+import { sayFloor } from './floor-words.ts';
+import { showWay } from './shown-way.ts';
+import { useWalk } from './use-walk.ts';
+import { useWaysIn } from './use-ways-in.ts';
+import { WayPlan } from './way-plan.tsx';
+import { sayHelp, sayWay } from './way-words.ts';
+
+const NO_POSES: never[] = [];
+
+/** How everybody gets to their place; looked for when it is opened. */
+export function WaysPanel() {
+  // What was taken: while something is dragged or typed nobody is sent anywhere.
+  const document = useRoom((state) => state.document);
+  const [open, setOpen] = useState(false);
+  return (
+    <section aria-labelledby="ways-heading">
+      <RuleHeading
+        id="ways-heading"
+        aside={
+          <Button look="word" aria-expanded={open} onClick={() => setOpen(!open)}>
+            {open ? 'Close ways in' : 'Show ways in'}
+          </Button>
+        }
+      >
+        Ways in
+      </RuleHeading>
+      {open && <Ways document={document} />}
+    </section>
+  );
+}
+
+function Ways({ document }: { document: SetDocument }) {
+  const { engine, style } = useSurroundings();
+  const { comers, heightsMm, found, fault } = useWaysIn(document);
+  const [chosen, setChosen] = useState<string>();
+  const way = found?.ways.find(({ placeId }) => placeId === chosen) ?? found?.ways[0];
+  const comer = comers.find(({ placeId }) => placeId === way?.placeId);
+  const poses = useMemo(() => way?.steps.flatMap((step) => step.poses) ?? NO_POSES, [way]);
+  const walk = useWalk(poses);
+  const still = matchMedia('(prefers-reduced-motion: reduce)').matches;
+  const floor = useMemo(() => wheelchairFloor(document, engine.ruleBook), [document, engine]);
+  useEffect(() => {
+    showWay(way);
+    return () => showWay(undefined);
+  }, [way]);
+  const length = (mm: number) => formatLength(mm, style);
+  const naming = {
+    length,
+    name: (placeId: string) => comers.find((one) => one.placeId === placeId)?.name ?? 'whoever sits there',
+  };
+  const stuck = found?.ways.filter(({ passes }) => !passes) ?? [];
+
+  return (
+    <div className="flex flex-col gap-3 text-sm">
+      {comers.length === 0 && <p>Seat somebody whose measures are known to see how they get in.</p>}
+      {fault && <p className="text-wont">{fault} Change the set or open this again.</p>}
+      {comers.length > 0 && !found && !fault && <p role="status">Looking for the ways in.</p>}
+      {way && found && (
+        <Select
+          label="Way in of"
+          value={way.placeId}
+          options={found.ways.map(({ placeId, passes }) => ({
+            value: placeId,
+            words: naming.name(placeId),
+            ...(passes ? {} : { detail: 'stuck' }),
+          }))}
+          onChange={setChosen}
+        />
+      )}
+      {(way ?? floor.length > 0) && (
+        <WayPlan
+          document={document}
+          way={way}
+          comer={comer}
+          heightsMm={heightsMm}
+          floor={floor}
+          walker={walk.pose}
+        />
+      )}
+      {way && (
+        <>
+          <div aria-live="polite">
+            <p>{sayWay(way, naming)}</p>
+            {sayHelp(way, naming).map((words) => (
+              <p key={words}>{words}</p>
+            ))}
+          </div>
+          {!still && poses.length > 1 && (
+            <Button size="small" onClick={walk.pose ? walk.stop : walk.start}>
+              {walk.pose ? 'Stop the walk' : 'Walk the way'}
+            </Button>
+          )}
+          <p className="text-ink-3">
+            {way.from === 'route'
+              ? 'From the start of the route.'
+              : 'From open floor beside the set; no route is kept.'}{' '}
+            Bodies as broad and deep as measured or estimated, in their clothes. Guidance: no check reads it.
+          </p>
+        </>
+      )}
+      {stuck.length > 0 && (
+        <div>
+          <h3 className="font-semibold">Who is stuck</h3>
+          <ul>
+            {stuck.map((one) => (
+              <li key={one.placeId}>{sayWay(one, naming)}</li>
+            ))}
+          </ul>
+        </div>
+      )}
+      {found && found.order.placeIds.length > 1 && (
+        <div>
+          <h3 className="font-semibold">In which order to sit</h3>
+          <ol className="list-decimal pl-5">
+            {found.order.placeIds.map((placeId) => (
+              <li key={placeId}>
+                {naming.name(placeId)}
+                {found.order.knotted.includes(placeId) && ', past somebody who makes room again'}
+              </li>
+            ))}
+          </ol>
+        </div>
+      )}
+      {floor.length > 0 && (
+        <div>
+          <h3 className="font-semibold">Floor for a wheelchair</h3>
+          <ul>
+            {floor.map((shape, n) => (
+              <li key={`${shape.kind}-${n}`}>{sayFloor(shape, length)}</li>
+            ))}
+          </ul>
+        </div>
+      )}
+    </div>
+  );
+}
