@@ -14,7 +14,6 @@ import { useShortcuts, type ShortcutActions } from '../hooks/use-shortcuts.ts';
 import { RoomContext, useAutosave, usePicture, useSurroundings } from '../room-context.tsx';
 import { useRoomStore, useUndo } from '../store.ts';
 import { WaysPanel } from '../ways/ways-panel.tsx';
-import { WaysPanel } from '../ways/ways-panel.tsx';
 import { ChosenPieces } from './chosen-pieces.tsx';
 import { ConflictScreen } from './conflict-screen.tsx';
 import { DraftRefused } from './draft-refused.tsx';
@@ -129,7 +128,6 @@ export function RoomDesk({ lastRevision, foot, aboutPiece }: Props) {
               aboutPiece={aboutPiece}
             />
             {!empty && <KeyPlan picture={picture} address={address} />}
-            {!empty && !clientView && <WaysPanel />}
             {!empty && !clientView && <WaysPanel />}
             <KnownDifferences document={document} onReplace={actions.replace} />
             {mayChange && !empty && <IssueRevision sheet={picture.sheet} lastLetter={lastRevision?.letter} />}
