@@ -151,6 +151,7 @@ describe('tiles', () => {
           tiles.some(({ xMm, yMm }) => x >= xMm && x <= xMm + across && y >= yMm && y <= yMm + down),
         ).toBe(true);
       }
+      if (tiles.length > 1) expect(tiles[0]).toMatchObject({ xMm: bounds.x });
       const [first, second] = tiles.filter(({ row }) => row === 0);
       if (second) expect((first!.xMm + across - second.xMm) / scale).toBeCloseTo(10, 6);
     }

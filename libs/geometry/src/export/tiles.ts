@@ -17,8 +17,8 @@ function starts(from: number, length: number, paperMm: number, scale: number): n
   if (length <= room) return [from + length / 2 - room / 2];
   const step = (paperMm - TILE_OVERLAP_MM) * scale;
   const count = 1 + Math.ceil((length - room) / step);
-  const spare = room + (count - 1) * step - length;
-  return Array.from({ length: count }, (_, n) => from - spare / 2 + n * step);
+  // The first sheet is full, what is left over goes on the last: whole pieces stand together on the first.
+  return Array.from({ length: count }, (_, n) => from + n * step);
 }
 
 /**

@@ -1,5 +1,12 @@
 import { scaleWords, type LengthStyle } from '@settlewright/geometry';
-import { LAYER_PENS, LAYERS, tilesOf, type SetDrawing, type Tile } from '@settlewright/geometry/export';
+import {
+  LAYER_PENS,
+  LAYERS,
+  TILE_OVERLAP_MM,
+  tilesOf,
+  type SetDrawing,
+  type Tile,
+} from '@settlewright/geometry/export';
 import { jsPDF } from 'jspdf';
 
 /** Landscape sheets, millimetres. */
@@ -134,6 +141,31 @@ function drawTile(doc: jsPDF, drawing: SetDrawing, tile: Tile, paper: PaperKey):
   doc.restoreGraphicsState();
 }
 
+/** Ticks where the neighbouring sheets begin: cut one sheet there and lay it on the other. */
+function drawJoins(doc: jsPDF, tile: Tile, tiles: readonly Tile[], paper: PaperKey): void {
+  const { widthMm, heightMm } = freeSpace(paper);
+  const [left, top] = [MARGIN_MM + 2, MARGIN_MM + 2];
+  const beside = (columns: number, rows: number) =>
+    tiles.some(({ column, row }) => column === tile.column + columns && row === tile.row + rows);
+  doc.setLineWidth(0.18);
+  for (const [side, x] of [
+    [-1, left + TILE_OVERLAP_MM],
+    [1, left + widthMm - TILE_OVERLAP_MM],
+  ] as const) {
+    if (!beside(side, 0)) continue;
+    doc.line(x, top, x, top + 4);
+    doc.line(x, top + heightMm - 4, x, top + heightMm);
+  }
+  for (const [side, y] of [
+    [-1, top + TILE_OVERLAP_MM],
+    [1, top + heightMm - TILE_OVERLAP_MM],
+  ] as const) {
+    if (!beside(0, side)) continue;
+    doc.line(left, y, left + 4, y);
+    doc.line(left + widthMm - 4, y, left + widthMm, y);
+  }
+}
+
 function drawFrame(
   doc: jsPDF,
   drawing: SetDrawing,
@@ -155,7 +187,8 @@ function drawFrame(
   write(doc, `Scale ${scaleWords(words.style.system, drawing.view.scale)}. Sizes govern.`, [middle, row(0)], {
     sizeMm: 3.2,
   });
-  const where = count === 1 ? '' : `, row ${tile.row + 1}, column ${tile.column + 1}; neighbours overlap`;
+  const where =
+    count === 1 ? '' : `, row ${tile.row + 1}, column ${tile.column + 1}; ticks mark where neighbours begin`;
   write(doc, `Sheet ${number} of ${count}${where}`, [middle, row(1)], { sizeMm: 3.2 });
   write(doc, 'Guidance for making, not certification.', [middle, row(2)], { sizeMm: 3.2 });
   const [end, bar] = [width - MARGIN_MM - 4, row(2) - 0.6];
@@ -185,6 +218,7 @@ export function pdfOf(
   tiles.forEach((tile, n) => {
     if (n > 0) doc.addPage([...PAPERS[paper]], 'landscape');
     drawTile(doc, drawing, tile, paper);
+    drawJoins(doc, tile, tiles, paper);
     drawFrame(doc, drawing, words, paper, [tile, n + 1, tiles.length]);
   });
   return doc.output('arraybuffer');
