@@ -8,7 +8,7 @@ import { as, createPerson, type Person } from './factories/people';
 import { createShop, type Shop } from './factories/shop';
 import { startTestApp, type TestApp } from './test-app';
 
-jest.setTimeout(60_000);
+jest.setTimeout(180_000);
 
 let test: TestApp;
 let routes: Route[];
