@@ -1,0 +1,96 @@
+import { createBodyModel, loadRuleBook } from '@settlewright/anthropometry';
+import { ARRANGEMENTS, findWaysIn, seatSitter, type SetDocument } from '@settlewright/geometry';
+import rules from '@settlewright/seed-data/fit-rules.json';
+import summary from '@settlewright/seed-data/populations/ansur2.json';
+import { render, screen, within } from '@testing-library/react';
+import userEvent from '@testing-library/user-event';
+import { afterEach, describe, expect, it, vi } from 'vitest';
+import { createPictureMaker } from '../picture.ts';
+import { RoomContext, type RoomSurroundings } from '../room-context.tsx';
+import { MANNEQUINS } from '../sitters.ts';
+import { createRoomStore, RoomStoreContext } from '../store.ts';
+import { useShownWay } from './shown-way.ts';
+import type { WaysQuestion } from './ways.worker.ts';
+import { WaysPanel } from './ways-panel.tsx';
+
+/** A worker that answers in this thread: a test has no other. */
+class NearWorker {
+  onmessage?: (event: { data: unknown }) => void;
+  postMessage({ id, document, comers, heightsMm }: WaysQuestion) {
+    const answer = findWaysIn(document, comers, heightsMm);
+    queueMicrotask(() => this.onmessage?.({ data: { id, answer } }));
+  }
+  terminate = () => undefined;
+}
+
+const engine = { model: createBodyModel(summary), ruleBook: loadRuleBook(rules) };
+const empty = ARRANGEMENTS.find(({ id }) => id === 'bench-window')?.build() as SetDocument;
+const [small, middle] = MANNEQUINS;
+
+function open(document: SetDocument, reducedMotion = false) {
+  vi.stubGlobal('Worker', NearWorker);
+  vi.stubGlobal('matchMedia', () => ({ matches: reducedMotion, addEventListener: () => undefined }));
+  const surroundings: RoomSurroundings = {
+    path: { workshopId: 'w', productionId: 'p', setId: 's' },
+    setName: 'Dining car',
+    canEdit: true,
+    detail: 'full',
+    style: { system: 'millimetres', roundTo: 8 },
+    cast: [],
+    engine,
+    maker: createPictureMaker(engine, []),
+  };
+  render(
+    <RoomContext value={surroundings}>
+      <RoomStoreContext value={createRoomStore(document)}>
+        <WaysPanel />
+      </RoomStoreContext>
+    </RoomContext>,
+  );
+  return userEvent.setup();
+}
+
+const seated = (): SetDocument => {
+  const one = seatSitter(empty, 'b1', 1, small ?? null);
+  return seatSitter(one, 'b1', 2, middle ?? null);
+};
+
+describe('ways in', () => {
+  afterEach(() => vi.unstubAllGlobals());
+
+  it('are found when asked for, and say where it is tight and who sits first', async () => {
+    const user = open(seated());
+    expect(screen.queryByText(/gets in/)).not.toBeInTheDocument();
+    await user.click(screen.getByRole('button', { name: 'Show ways in' }));
+    expect(await screen.findByText(/gets in\. Tightest between B1 and T1/)).toBeVisible();
+    const order = within(screen.getByRole('list')).getAllByRole('listitem');
+    expect(order.map((item) => item.textContent)).toEqual([
+      expect.stringContaining('50th'),
+      expect.stringContaining('5th'),
+    ]);
+    expect(useShownWay.getState().way?.placeId).toBe('b1:1');
+    await user.click(screen.getByRole('button', { name: 'Close ways in' }));
+    expect(useShownWay.getState().way).toBeUndefined();
+  });
+
+  it('are walked by a button that stops as well', async () => {
+    const user = open(seated());
+    await user.click(screen.getByRole('button', { name: 'Show ways in' }));
+    await user.click(await screen.findByRole('button', { name: 'Walk the way' }));
+    await user.click(screen.getByRole('button', { name: 'Stop the walk' }));
+    expect(screen.getByRole('button', { name: 'Walk the way' })).toBeVisible();
+  });
+
+  it('stand still where motion is unwelcome', async () => {
+    const user = open(seated(), true);
+    await user.click(screen.getByRole('button', { name: 'Show ways in' }));
+    expect(await screen.findByText(/gets in/)).toBeVisible();
+    expect(screen.queryByRole('button', { name: 'Walk the way' })).not.toBeInTheDocument();
+  });
+
+  it('ask for people where nobody sits', async () => {
+    const user = open(empty);
+    await user.click(screen.getByRole('button', { name: 'Show ways in' }));
+    expect(screen.getByText(/Seat somebody/)).toBeVisible();
+  });
+});
