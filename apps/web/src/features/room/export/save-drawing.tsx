@@ -89,7 +89,9 @@ export default function SaveDrawing({ onClose }: { onClose: () => void }) {
         return pdfOf(drawing, { setName, version, style }, paper, await loadSheetFonts());
       }
       case 'png': {
-        const still = await takeStill(getComputedStyle(document.body).backgroundColor);
+        const still = await takeStill(
+          getComputedStyle(document.documentElement).getPropertyValue('--color-paper'),
+        );
         if (!still) throw new Error('The scene is not drawn at the moment, so there is no picture of it.');
         return still;
       }
@@ -125,7 +127,7 @@ export default function SaveDrawing({ onClose }: { onClose: () => void }) {
       wide
       onClose={onClose}
       title="Save a drawing"
-      describe="Made here in the browser, from the boards and cushions of the pieces. Nothing in it shows who sits."
+      describe="Made here in the browser, from the boards and cushions of the pieces."
     >
       {problem && (
         <Notice tone="wont" className="mb-5">
@@ -177,7 +179,8 @@ export default function SaveDrawing({ onClose }: { onClose: () => void }) {
           <p className="text-sm text-ink-2" role="status">
             {kind === 'pdf' && sheetWords(sheets, paper)}
             {kind === 'dxf' && `Full size, in ${style.system === 'millimetres' ? 'millimetres' : 'inches'}.`}
-            {kind === 'png' && 'The scene as it stands on the screen, without tapes and names.'}
+            {kind === 'png' &&
+              'The scene as it stands on the screen, with the bodies shown there; no tapes, no names.'}
             {kind === 'glb' && 'In metres, without bodies.'}
           </p>
           <div className="flex flex-wrap gap-3">
