@@ -44,6 +44,8 @@ export {
   type SeatPosture,
 } from './mannequin/pose.ts';
 export type { MannequinSegment, MannequinTag } from './mannequin/segments.ts';
+export { sitterDistances } from './distance/sitter-distances.ts';
+export * from './distance/sitter-gap.ts';
 export type { PostureChoice } from './room/posture-choice.ts';
 export * from './mannequin/joint-angles.ts';
 export * from './mannequin/joint-ranges.ts';
@@ -54,14 +56,6 @@ export { gapBetween, type Gap } from './distance/gap.ts';
 export { partShape, segmentShape } from './distance/solids.ts';
 export type { Shape } from './distance/shape.ts';
 export { skinGap } from './distance/skin-gap.ts';
-export {
-  CONTACT_MM,
-  sitterDistances,
-  type PlacedBody,
-  type SitterDistances,
-  type SitterGap,
-  type Thing,
-} from './distance/sitter-distances.ts';
 export * from './drawing/drawing.ts';
 export { leastWornColour, SITTER_COLOURS, type SitterColour } from './drawing/sitter-colours.ts';
 export { planOf, type PlanOptions } from './drawing/plan.ts';

@@ -45,9 +45,14 @@ export function coreDistance(one: Shape, other: Shape, atMostMm: number): CoreGa
     if (atLeast > atMostMm) return undefined;
     if (step > 0 && norm - atLeast < CLOSE_ENOUGH_MM) break;
     if (isKnown(wx, wy, wz)) break;
-    s.w.set([wx, wy, wz], s.count * 3);
-    s.a.set(onOne, s.count * 3);
-    s.b.set(onOther, s.count * 3);
+    const at = s.count * 3;
+    s.w[at] = wx;
+    s.w[at + 1] = wy;
+    s.w[at + 2] = wz;
+    for (let i = 0; i < 3; i++) {
+      s.a[at + i] = onOne[i]!;
+      s.b[at + i] = onOther[i]!;
+    }
     s.count += 1;
     const before = square;
     square = reduceToNearest(s);

@@ -17,14 +17,14 @@ export interface Shape extends Bounds {
   support: (x: number, y: number, z: number, out: Float64Array) => void;
 }
 
-const boundsOf = (points: readonly (readonly [at: Vec3, radius: number])[]): Bounds => {
-  const edge = (axis: 0 | 1 | 2, sign: 1 | -1): number =>
-    sign * Math.max(...points.map(([at, radius]) => sign * at[axis] + radius));
-  return {
-    minMm: [edge(0, -1), edge(1, -1), edge(2, -1)],
-    maxMm: [edge(0, 1), edge(1, 1), edge(2, 1)],
-  };
-};
+function boundsOf(points: readonly Vec3[], radius: number): Bounds {
+  return grown(boundsAround(points.map((at) => ({ minMm: at, maxMm: at }))), radius);
+}
+
+const grown = ({ minMm, maxMm }: Bounds, by: number): Bounds => ({
+  minMm: [minMm[0] - by, minMm[1] - by, minMm[2] - by],
+  maxMm: [maxMm[0] + by, maxMm[1] + by, maxMm[2] + by],
+});
 
 /**
  * A ball that runs along a line while its radius changes evenly; a capsule with equal radii, a ball with equal ends.
@@ -40,9 +40,9 @@ export function roundedCone(from: Vec3, fromRadiusMm: number, to: Vec3, toRadius
   const [x0, y0, z0] = from;
   const [x1, y1, z1] = to;
   return {
-    ...boundsOf([
-      [from, fromRadiusMm],
-      [to, toRadiusMm],
+    ...boundsAround([
+      grown({ minMm: from, maxMm: from }, fromRadiusMm),
+      grown({ minMm: to, maxMm: to }, toRadiusMm),
     ]),
     marginMm,
     support: (x, y, z, out) => {
@@ -88,7 +88,7 @@ export function ellipsoid(centre: Vec3, axes: readonly [Vec3, Vec3, Vec3]): Shap
 export function hull(corners: readonly Vec3[]): Shape {
   const p = Float64Array.from(corners.flat());
   return {
-    ...boundsOf(corners.map((corner) => [corner, 0])),
+    ...boundsOf(corners, 0),
     marginMm: 0,
     support: (x, y, z, out) => {
       let [best, at] = [-Infinity, 0];
@@ -111,7 +111,7 @@ export function hull(corners: readonly Vec3[]): Shape {
  */
 export const hullOfBalls = (centres: readonly Vec3[], radiusMm: number): Shape => ({
   ...hull(centres),
-  ...boundsOf(centres.map((centre) => [centre, radiusMm])),
+  ...boundsOf(centres, radiusMm),
   marginMm: radiusMm,
 });
 
@@ -147,15 +147,15 @@ export function cylinder(centre: Vec3, half: Vec3, radiusMm: number): Shape {
 
 /** The box around boxes. */
 export function boundsAround(all: readonly Bounds[]): Bounds {
-  const edge = (axis: 0 | 1 | 2): [number, number] => {
-    let [low, high] = [Infinity, -Infinity];
-    for (const { minMm, maxMm } of all) {
-      low = Math.min(low, minMm[axis]);
-      high = Math.max(high, maxMm[axis]);
-    }
-    return [low, high];
-  };
-  const [[x0, x1], [y0, y1], [z0, z1]] = [edge(0), edge(1), edge(2)];
+  let [x0, y0, z0, x1, y1, z1] = [Infinity, Infinity, Infinity, -Infinity, -Infinity, -Infinity];
+  for (const { minMm, maxMm } of all) {
+    x0 = Math.min(x0, minMm[0]);
+    y0 = Math.min(y0, minMm[1]);
+    z0 = Math.min(z0, minMm[2]);
+    x1 = Math.max(x1, maxMm[0]);
+    y1 = Math.max(y1, maxMm[1]);
+    z1 = Math.max(z1, maxMm[2]);
+  }
   return { minMm: [x0, y0, z0], maxMm: [x1, y1, z1] };
 }
 

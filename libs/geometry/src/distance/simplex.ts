@@ -102,11 +102,17 @@ export function reduceToNearest(s: Simplex): number {
         : s.count === 3
           ? nearestOnTriangle(w, 0, 1, 2)
           : nearestOnTetrahedron(w);
-  nearest.kept.forEach((from, to) => {
-    s.share[to] = nearest.shares[to]!;
-    if (from === to) return;
-    for (const list of [s.w, s.a, s.b]) list.copyWithin(to * 3, from * 3, from * 3 + 3);
-  });
-  s.count = nearest.kept.length;
+  const { kept, shares } = nearest;
+  for (let to = 0; to < kept.length; to++) {
+    const from = kept[to]!;
+    s.share[to] = shares[to]!;
+    if (from === to) continue;
+    for (let i = 0; i < 3; i++) {
+      s.w[to * 3 + i] = s.w[from * 3 + i]!;
+      s.a[to * 3 + i] = s.a[from * 3 + i]!;
+      s.b[to * 3 + i] = s.b[from * 3 + i]!;
+    }
+  }
+  s.count = kept.length;
   return nearest.square;
 }

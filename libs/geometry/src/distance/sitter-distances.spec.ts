@@ -4,7 +4,8 @@ import type { MannequinSegment } from '../mannequin/segments.ts';
 import { mannequinMesh } from '../mannequin/mesh.ts';
 import type { Part, Vec3 } from '../parts/part.ts';
 import { gapBetween } from './gap.ts';
-import { CONTACT_MM, sitterDistances } from './sitter-distances.ts';
+import { sitterDistances } from './sitter-distances.ts';
+import { CONTACT_MM } from './sitter-gap.ts';
 import { skinGap } from './skin-gap.ts';
 import { partShape, segmentShape } from './solids.ts';
 

@@ -1,48 +1,16 @@
-import type { MannequinMesh } from '../mannequin/mesh.ts';
-import type { MannequinPose } from '../mannequin/pose.ts';
 import type { Part, PartRole, Vec3 } from '../parts/part.ts';
-import { gapBetween, type Gap } from './gap.ts';
+import { gapBetween } from './gap.ts';
 import { boundsAround, boundsGap, type Bounds, type Shape } from './shape.ts';
+import {
+  CONTACT_MM,
+  type PlacedBody,
+  type SitterDistances,
+  type SitterGap,
+  type Thing,
+} from './sitter-gap.ts';
 import { skinGap } from './skin-gap.ts';
 import { partShape, segmentShape } from './solids.ts';
 
-/** A body in its posture at its place. */
-export interface PlacedBody {
-  placeId: string;
-  /** The piece it sits on. */
-  pieceId: string;
-  pose: Pick<MannequinPose, 'segments'>;
-  /** The near mesh; where it is given, distances from parts are measured on it. */
-  mesh?: MannequinMesh;
-}
-
-/** What a body comes near to. */
-export type Thing =
-  | { kind: 'part'; partId: string; pieceId: string; role: PartRole }
-  | { kind: 'body'; placeId: string; segment: string };
-
-/** One distance of a sitter. */
-export interface SitterGap extends Gap {
-  /** The place of the body, such as `left forearm`. */
-  segment: string;
-  thing: Thing;
-  /** Solids stand for the body within 3 mm, elbows and shoulders of raised arms within 10. */
-  measuredOn: 'skin' | 'solids';
-}
-
-/** What a sitter touches and how much room there is beyond that. */
-export interface SitterDistances {
-  placeId: string;
-  /** Further in than 3 mm, deepest first. */
-  overlaps: SitterGap[];
-  /** Within 3 mm of each other. */
-  contacts: SitterGap[];
-  /** The smallest gap to anything the sitter does not touch; absent where nothing is within the reach. */
-  smallest?: SitterGap;
-}
-
-/** Nearer than this, up to as much inside, two things touch: the accuracy of the body. */
-export const CONTACT_MM = 3;
 /** Gaps wider than this are in nobody's way. */
 const REACH_MM = 1500;
 /** What a sitter rests on by sitting there. */
@@ -73,6 +41,15 @@ interface Other {
   solids: readonly Solid[];
 }
 
+/** A stretch of a body and a solid it may come near to. */
+interface Pair {
+  segment: string;
+  shape: Shape;
+  solid: Solid;
+  /** Least distance that their boxes leave open. */
+  atLeast: number;
+}
+
 /**
  * Contacts, overlaps and the smallest gap of every sitter, to parts and to the other sitters. The seat and the back that
  * a sitter rests on are left out: how far a cushion gives way is the posture's matter.
@@ -88,71 +65,92 @@ export function sitterDistances(bodies: readonly PlacedBody[], parts: readonly P
   });
   const neighbours = made.map(({ of, solids, bounds }): Other => ({
     bounds,
-    solids: solids.map(({ name, shape }) => ({
+    solids: solids.map(({ name, shape }): Solid => ({
       shape,
       thing: { kind: 'body', placeId: of.placeId, segment: name },
     })),
   }));
-  const furniture = parts.map(({ id, pieceId, role, ...part }) => {
-    const shape = partShape({ id, pieceId, role, ...part });
-    const thing: Thing = { kind: 'part', partId: id, pieceId, role };
-    return { pieceId, role, bounds: shape, solids: [{ shape, thing }] };
+  const furniture = parts.map((part) => {
+    const { id, pieceId, role } = part;
+    const solid: Solid = { shape: partShape(part), thing: { kind: 'part', partId: id, pieceId, role } };
+    return { pieceId, role, bounds: solid.shape, solids: [solid] };
   });
   return made.map((body, i) => {
-    const others: Other[] = [
-      ...furniture.filter(({ pieceId, role }) => pieceId !== body.of.pieceId || !SEAT_ROLES.includes(role)),
+    const own = body.of.pieceId;
+    const others = [
+      ...furniture.filter(({ pieceId, role }) => pieceId !== own || !SEAT_ROLES.includes(role)),
       ...neighbours.filter((_, j) => j !== i),
     ];
     return distancesOf(body, others);
   });
 }
 
-/** Goes through what is there by the least distance it can have, so that most of it is never looked at. */
 function distancesOf(body: Body, others: readonly Other[]): SitterDistances {
+  const found: SitterDistances = { placeId: body.of.placeId, overlaps: [], contacts: [] };
+  const clear: Other[] = [];
+  for (const other of others) {
+    const met = meetings(body, other).sort((a, b) => a.distanceMm - b.distanceMm);
+    if (met.length === 0) clear.push(other);
+    met.forEach((gap, i) => {
+      const measured = i === 0 ? onSkin(body, gap, other) : gap;
+      (measured.distanceMm < -CONTACT_MM ? found.overlaps : found.contacts).push(measured);
+    });
+  }
+  found.overlaps.sort((a, b) => a.distanceMm - b.distanceMm);
+  const nearest = smallestGap(body, clear);
+  return nearest ? { ...found, smallest: onSkin(body, nearest.gap, nearest.other) } : found;
+}
+
+/** Contacts and overlaps with one thing: for each stretch of the body the deepest. */
+function meetings(body: Body, other: Other): SitterGap[] {
+  if (boundsGap(body.bounds, other.bounds) > CONTACT_MM) return [];
+  return body.solids.flatMap(({ name, shape }) => {
+    if (boundsGap(shape, other.bounds) > CONTACT_MM) return [];
+    let deepest: SitterGap | undefined;
+    for (const { shape: theirs, thing } of other.solids) {
+      const gap = gapBetween(shape, theirs, CONTACT_MM);
+      if (gap && (!deepest || gap.distanceMm < deepest.distanceMm)) {
+        deepest = { ...gap, segment: name, thing, measuredOn: 'solids' };
+      }
+    }
+    return deepest ? [deepest] : [];
+  });
+}
+
+/** Goes through the pairs by the least distance they can have, so that most are never looked at. */
+function smallestGap(body: Body, others: readonly Other[]): { gap: SitterGap; other: Other } | undefined {
   const byBounds = others
     .map((other) => ({ other, atLeast: boundsGap(body.bounds, other.bounds) }))
     .filter(({ atLeast }) => atLeast < REACH_MM)
-    .sort((a, b) => a.atLeast - b.atLeast);
-  const found: SitterDistances = { placeId: body.of.placeId, overlaps: [], contacts: [] };
-  let smallest: SitterGap | undefined;
-  for (const { other, atLeast } of byBounds) {
-    const limit = smallest?.distanceMm ?? REACH_MM;
-    if (atLeast > limit) break;
-    for (const gap of gapsTo(body, other, limit)) {
-      if (gap.distanceMm < -CONTACT_MM) found.overlaps.push(gap);
-      else if (gap.distanceMm <= CONTACT_MM) found.contacts.push(gap);
-      else if (!smallest || gap.distanceMm < smallest.distanceMm) smallest = gap;
+    // Parts before bodies: one solid each soon says how near is near.
+    .sort((a, b) => a.atLeast - b.atLeast || a.other.solids.length - b.other.solids.length);
+  let best: { gap: SitterGap; other: Other } | undefined;
+  let limit = REACH_MM;
+  for (const { other, atLeast: whole } of byBounds) {
+    if (whole > limit) break;
+    const pairs: Pair[] = [];
+    const theirs = other.solids.filter(({ shape }) => boundsGap(body.bounds, shape) <= limit);
+    for (const { name: segment, shape } of body.solids) {
+      if (boundsGap(shape, other.bounds) > limit) continue;
+      for (const solid of theirs) {
+        const atLeast = boundsGap(shape, solid.shape);
+        if (atLeast <= limit) pairs.push({ segment, shape, solid, atLeast });
+      }
+    }
+    pairs.sort((a, b) => a.atLeast - b.atLeast);
+    for (const { segment, shape, solid, atLeast } of pairs) {
+      if (atLeast > limit) break;
+      const gap = gapBetween(shape, solid.shape, limit);
+      if (!gap || gap.distanceMm >= limit) continue;
+      limit = gap.distanceMm;
+      best = { gap: { ...gap, segment, thing: solid.thing, measuredOn: 'solids' }, other };
     }
   }
-  found.overlaps.sort((a, b) => a.distanceMm - b.distanceMm);
-  return smallest ? { ...found, smallest } : found;
-}
-
-/** Every contact and overlap with one thing, a stretch of the body each; where there is none, the smallest gap. */
-function gapsTo(body: Body, other: Other, limit: number): SitterGap[] {
-  const met: SitterGap[] = [];
-  let nearest: SitterGap | undefined;
-  for (const { name, shape } of body.solids) {
-    if (boundsGap(shape, other.bounds) > Math.min(limit, nearest?.distanceMm ?? limit)) continue;
-    let deepest: SitterGap | undefined;
-    for (const solid of other.solids) {
-      const atMost = Math.max(CONTACT_MM, Math.min(limit, nearest?.distanceMm ?? limit));
-      const gap = gapBetween(shape, solid.shape, atMost);
-      if (!gap) continue;
-      const one: SitterGap = { ...gap, segment: name, thing: solid.thing, measuredOn: 'solids' };
-      if (gap.distanceMm > CONTACT_MM) {
-        if (!nearest || gap.distanceMm < nearest.distanceMm) nearest = one;
-      } else if (!deepest || gap.distanceMm < deepest.distanceMm) deepest = one;
-    }
-    if (deepest) met.push(deepest);
-  }
-  if (met.length === 0) return nearest ? [onSkin(body, other, nearest)] : [];
-  met.sort((a, b) => a.distanceMm - b.distanceMm);
-  return met.map((gap, i) => (i === 0 ? onSkin(body, other, gap) : gap));
+  return best;
 }
 
 /** The same distance measured on the mesh, where there is one. */
-function onSkin(body: Body, other: Other, gap: SitterGap): SitterGap {
+function onSkin(body: Body, gap: SitterGap, other: Other): SitterGap {
   const { mesh } = body.of;
   const [only] = other.solids;
   if (!mesh || only?.thing.kind !== 'part') return gap;
