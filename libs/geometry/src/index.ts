@@ -10,6 +10,7 @@ export * from './parts/part.ts';
 export * from './parts/placement.ts';
 export * from './parts/boards.ts';
 export * from './room/document.ts';
+export type { PostureChoice } from './room/posture-choice.ts';
 export * from './room/read-document.ts';
 export * from './room/seating.ts';
 export * from './room/edit-pieces.ts';
@@ -44,9 +45,6 @@ export {
   type SeatPosture,
 } from './mannequin/pose.ts';
 export type { MannequinSegment, MannequinTag } from './mannequin/segments.ts';
-export { sitterDistances } from './distance/sitter-distances.ts';
-export * from './distance/sitter-gap.ts';
-export type { PostureChoice } from './room/posture-choice.ts';
 export * from './mannequin/joint-angles.ts';
 export * from './mannequin/joint-ranges.ts';
 export { footRailOf } from './mannequin/foot-rail.ts';
@@ -56,6 +54,8 @@ export { gapBetween, type Gap } from './distance/gap.ts';
 export { partShape, segmentShape } from './distance/solids.ts';
 export type { Shape } from './distance/shape.ts';
 export { skinGap } from './distance/skin-gap.ts';
+export { sitterDistances } from './distance/sitter-distances.ts';
+export * from './distance/sitter-gap.ts';
 export * from './drawing/drawing.ts';
 export { leastWornColour, SITTER_COLOURS, type SitterColour } from './drawing/sitter-colours.ts';
 export { planOf, type PlanOptions } from './drawing/plan.ts';
