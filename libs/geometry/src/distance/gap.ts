@@ -20,18 +20,20 @@ export interface Gap {
  *
  * @param one - a solid
  * @param other - another solid
- * @param atMostMm - larger distances are of no matter
+ * @param atMostMm - larger distances are of no matter; below 0 only overlaps deeper than that are
  * @returns the gap within 0.01 mm, overlaps within 0.1 mm (0.5 mm deep inside of round solids); `undefined` beyond the
  * limit
  */
 export function gapBetween(one: Shape, other: Shape, atMostMm = Infinity): Gap | undefined {
-  if (boundsGap(one, other) > atMostMm) return undefined;
+  // A limit below 0 asks for overlaps alone: boxes and cores that meet say nothing of how deep.
+  if (boundsGap(one, other) > Math.max(0, atMostMm)) return undefined;
   const margins = one.marginMm + other.marginMm;
-  const cores = coreDistance(one, other, atMostMm + margins);
+  const cores = coreDistance(one, other, Math.max(0, atMostMm + margins));
   if (!cores) return undefined;
   const { distanceMm, from, to } = cores;
   if (distanceMm === 0) {
     const { depthMm, direction, ...points } = depthOf(one, other);
+    if (-depthMm > atMostMm) return undefined;
     return { distanceMm: -depthMm, fromMm: points.from, toMm: points.to, direction };
   }
   if (distanceMm - margins > atMostMm) return undefined;

@@ -56,6 +56,16 @@ describe('what elbows and knees sweep', () => {
     expect(missing.partId).toBe('w/wall-board-1');
     expect(envelopeGap(elbow, [wallAt(out + 900)], 500)).toBeUndefined();
   });
+
+  it('finds the wall that is deepest in, whichever comes first', () => {
+    const elbow = of('elbow', 'left');
+    const out = elbow.shape.maxMm[0];
+    const [little, much] = [wallAt(out - 10), wallAt(out - 40)];
+    const deepest = envelopeGap(elbow, [much], 500)!.distanceMm;
+    expect(deepest).toBeLessThan(envelopeGap(elbow, [little], 500)!.distanceMm - 1);
+    expect(envelopeGap(elbow, [little, much], 500)!.distanceMm).toBeCloseTo(deepest, 3);
+    expect(envelopeGap(elbow, [much, little], 500)!.distanceMm).toBeCloseTo(deepest, 3);
+  });
 });
 
 describe('a rail for the feet', () => {
