@@ -2,7 +2,7 @@ import { ruleNumber } from '@settlewright/anthropometry';
 import type { Comer, SetDocument, WaysIn } from '@settlewright/geometry';
 import { useEffect, useMemo, useState } from 'react';
 import { useSurroundings } from '../room-context.tsx';
-import { sittersOf } from '../sitters.ts';
+import { sitterName, sittersOf } from '../sitters.ts';
 import { askWays } from './ask-ways.ts';
 
 /** Somebody on the way in, with the name that the page calls them by. */
@@ -12,6 +12,8 @@ export interface NamedComer extends Comer {
 
 export interface WaysFound {
   comers: readonly NamedComer[];
+  /** Names of who sits in the set and has no measures here, or none that make a body: nothing is said of them. */
+  leftOut: readonly string[];
   heightsMm: readonly [number, number];
   /** Of this very document; undefined while it is looked for. */
   found: WaysIn | undefined;
@@ -31,15 +33,24 @@ export function useWaysIn(document: SetDocument): WaysFound {
       sittersOf(document, cast, model).flatMap(({ placeId, name, person, noBody }): NamedComer[] => {
         if (noBody) return [];
         const { shoeMm, clothing } = person;
-        return [{ placeId, name, measures: model.predict(person).means(), shoeMm, clothing }];
+        const measures = model.predict(person).means();
+        // A slipped digit in one measure may put another below nothing: such a body would pass everywhere.
+        if (Object.values(measures).some((value) => !(value > 0))) return [];
+        return [{ placeId, name, measures, shoeMm, clothing }];
       }),
     [document, cast, model],
   );
+  const leftOut = useMemo(() => {
+    const counted = new Set(comers.map(({ placeId }) => placeId));
+    return document.seating
+      .filter(({ pieceId, place }) => !counted.has(`${pieceId}:${place}`))
+      .map(({ sitter }) => sitterName(sitter, cast));
+  }, [document, cast, comers]);
   const [answer, setAnswer] = useState<{ to: typeof comers; found?: WaysIn; fault?: string }>();
   useEffect(() => {
     let wanted = true;
-    askWays({ document, comers, heightsMm }).then(
-      (found) => wanted && setAnswer({ to: comers, found }),
+    askWays({ document, comers, heightsMm }, () => wanted).then(
+      (found) => wanted && found && setAnswer({ to: comers, found }),
       (fault: unknown) =>
         wanted && setAnswer({ to: comers, fault: fault instanceof Error ? fault.message : String(fault) }),
     );
@@ -48,5 +59,5 @@ export function useWaysIn(document: SetDocument): WaysFound {
     };
   }, [document, comers, heightsMm]);
   const current = answer?.to === comers ? answer : undefined;
-  return { comers, heightsMm, found: current?.found, fault: current?.fault };
+  return { comers, leftOut, heightsMm, found: current?.found, fault: current?.fault };
 }

@@ -44,3 +44,7 @@ export function sayHelp({ past, chairs }: WayIn, { name }: Naming): string[] {
     ...(chairs.length > 0 ? [`Take ${joinWords(chairs.map(({ mark }) => mark))} out of the way.`] : []),
   ];
 }
+
+/** Of whom nothing is known here: neither how they get in nor whether others get past them. */
+export const sayLeftOut = (names: readonly string[]): string =>
+  `Not known: how ${joinWords(names)} ${names.length === 1 ? 'gets' : 'get'} in, and whether others get past. Their measures are not known here.`;

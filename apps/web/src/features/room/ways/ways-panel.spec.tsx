@@ -5,6 +5,7 @@ import summary from '@settlewright/seed-data/populations/ansur2.json';
 import { render, screen, within } from '@testing-library/react';
 import userEvent from '@testing-library/user-event';
 import { afterEach, describe, expect, it, vi } from 'vitest';
+import type { CastMember } from '@/lib/contract.ts';
 import { createPictureMaker } from '../picture.ts';
 import { RoomContext, type RoomSurroundings } from '../room-context.tsx';
 import { MANNEQUINS } from '../sitters.ts';
@@ -27,7 +28,7 @@ const engine = { model: createBodyModel(summary), ruleBook: loadRuleBook(rules) 
 const empty = ARRANGEMENTS.find(({ id }) => id === 'bench-window')?.build() as SetDocument;
 const [small, middle] = MANNEQUINS;
 
-function open(document: SetDocument, reducedMotion = false) {
+function open(document: SetDocument, reducedMotion = false, cast: readonly CastMember[] = []) {
   vi.stubGlobal('Worker', NearWorker);
   vi.stubGlobal('matchMedia', () => ({ matches: reducedMotion, addEventListener: () => undefined }));
   const surroundings: RoomSurroundings = {
@@ -36,7 +37,7 @@ function open(document: SetDocument, reducedMotion = false) {
     canEdit: true,
     detail: 'full',
     style: { system: 'millimetres', roundTo: 8 },
-    cast: [],
+    cast,
     engine,
     maker: createPictureMaker(engine, []),
   };
@@ -86,6 +87,25 @@ describe('ways in', () => {
     await user.click(screen.getByRole('button', { name: 'Show ways in' }));
     expect(await screen.findByText(/gets in/)).toBeVisible();
     expect(screen.queryByRole('button', { name: 'Walk the way' })).not.toBeInTheDocument();
+  });
+
+  it('name those whose measures are not seen here or make no body, and count nothing of them', async () => {
+    const member = (id: string, name: string): CastMember => ({ id, name, role: '', colour: 1 });
+    const slipped: CastMember = {
+      ...member('c2', 'Ben'),
+      bodyData: 'men',
+      measured: { acromial_height_sitting: { mm: 60 } },
+      shoeMm: 25,
+      clothing: 'light',
+    };
+    const first = seatSitter(empty, 'b1', 1, { kind: 'cast', castId: 'c1' });
+    const second = seatSitter(first, 'b1', 2, { kind: 'cast', castId: 'c2' });
+    const user = open(second, false, [member('c1', 'Ada'), slipped]);
+    await user.click(screen.getByRole('button', { name: 'Show ways in' }));
+    expect(
+      screen.getByText(/^Not known: how Ada and Ben get in, and whether others get past\./),
+    ).toBeVisible();
+    expect(screen.queryByText(/gets in/)).not.toBeInTheDocument();
   });
 
   it('ask for people where nobody sits', async () => {

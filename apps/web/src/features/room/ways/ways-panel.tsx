@@ -10,7 +10,7 @@ import { showWay } from './shown-way.ts';
 import { useWalk } from './use-walk.ts';
 import { useWaysIn } from './use-ways-in.ts';
 import { WayPlan } from './way-plan.tsx';
-import { sayHelp, sayWay } from './way-words.ts';
+import { sayHelp, sayLeftOut, sayWay } from './way-words.ts';
 
 const NO_POSES: never[] = [];
 
@@ -38,7 +38,7 @@ export function WaysPanel() {
 
 function Ways({ document }: { document: SetDocument }) {
   const { engine, style } = useSurroundings();
-  const { comers, heightsMm, found, fault } = useWaysIn(document);
+  const { comers, leftOut, heightsMm, found, fault } = useWaysIn(document);
   const [chosen, setChosen] = useState<string>();
   const way = found?.ways.find(({ placeId }) => placeId === chosen) ?? found?.ways[0];
   const comer = comers.find(({ placeId }) => placeId === way?.placeId);
@@ -60,6 +60,7 @@ function Ways({ document }: { document: SetDocument }) {
   return (
     <div className="flex flex-col gap-3 text-sm">
       {comers.length === 0 && <p>Seat somebody whose measures are known to see how they get in.</p>}
+      {leftOut.length > 0 && <p>{sayLeftOut(leftOut)}</p>}
       {fault && <p className="text-wont">{fault} Change the set or open this again.</p>}
       {comers.length > 0 && !found && !fault && <p role="status">Looking for the ways in.</p>}
       {way && found && (
