@@ -19,8 +19,10 @@ vi.mock('@/lib/download.ts', () => ({
 beforeEach(() => kept.splice(0));
 afterEach(() => vi.restoreAllMocks());
 
-function open() {
-  const store = createRoomStore(ARRANGEMENTS.find(({ id }) => id === 'facing-benches')!.build());
+const benches = ARRANGEMENTS.find(({ id }) => id === 'facing-benches')!.build();
+
+function open(document = benches) {
+  const store = createRoomStore(document);
   const surroundings = {
     path: { workshopId: 'w', productionId: 'p', setId: 's' },
     setName: 'Dining car',
@@ -66,6 +68,17 @@ it('shows a section where it is asked for, and none that cannot be read', async 
   fireEvent.change(field, { target: { value: 'here' } });
   fireEvent.blur(field);
   expect(screen.getByRole('button', { name: 'Save' })).toBeDisabled();
+});
+
+it('prints no more sheets than anybody joins', async () => {
+  const [first, ...others] = benches.pieces;
+  open({ ...benches, pieces: [{ ...first!, at: { ...first!.at, xMm: 40_000 } }, ...others] });
+  expect(screen.getByRole('button', { name: 'Save' })).toBeEnabled();
+  await choose(/^Scale/, /^3″/);
+  expect(screen.getByRole('status')).toHaveTextContent(/too many to print; at most 100/);
+  expect(screen.getByRole('button', { name: 'Save' })).toBeDisabled();
+  await choose(/^File/, /SVG/);
+  expect(screen.getByRole('button', { name: 'Save' })).toBeEnabled();
 });
 
 it('says in words that no scene stands on the screen', async () => {

@@ -40,6 +40,8 @@ const TYPES: Record<FileKind, string> = {
   glb: 'model/gltf-binary',
 };
 const FARTHEST_MM = 50_000;
+/** A page that makes more stands still for too long, and nobody joins as many. */
+const MOST_SHEETS = 100;
 const PAPER_CHOICES = [
   { value: 'letter', words: 'Letter' },
   { value: 'a4', words: 'A4' },
@@ -188,7 +190,10 @@ export default function SaveDrawing({ onClose }: { onClose: () => void }) {
               look="main"
               busy={busy}
               busyWords="Drawing"
-              disabled={isDrawing && isCut && (cut.problem !== undefined || cut.value === null)}
+              disabled={
+                sheets > MOST_SHEETS ||
+                (isDrawing && isCut && (cut.problem !== undefined || cut.value === null))
+              }
               onClick={() => void save()}
             >
               Save
@@ -215,5 +220,8 @@ function sheetWords(sheets: number, paper: PaperKey): string {
   const { widthMm, heightMm } = freeSpace(paper);
   const name = paper === 'a4' ? 'A4' : 'Letter';
   if (sheets === 1) return `One sheet of ${name}.`;
+  if (sheets > MOST_SHEETS) {
+    return `${sheets} sheets of ${name} are too many to print; at most ${MOST_SHEETS}. Choose a smaller scale.`;
+  }
   return `${sheets} sheets of ${name}, each showing ${Math.round(widthMm)} by ${Math.round(heightMm)} mm of paper. The scale is kept; they overlap for joining.`;
 }
