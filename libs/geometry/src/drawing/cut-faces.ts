@@ -30,7 +30,9 @@ function alongAxis({ base, axis }: ViewSolid, depth: number): PagePoint[][] {
     const t = (depth - a[2]) / (b[2] - a[2]);
     met.push([a[0] + (b[0] - a[0]) * t, a[1] + (b[1] - a[1]) * t, depth]);
   });
-  met.sort((a, b) => a[0] - b[0] || a[1] - b[1]);
+  // They lie on one line across the axis. By x and y they would not come in its order where rounding alone parts the x.
+  const across = ([x, y]: Vec3): number => axis[0] * y - axis[1] * x;
+  met.sort((a, b) => across(a) - across(b));
   const faces: PagePoint[][] = [];
   for (let i = 0; i + 1 < met.length; i += 2) {
     const [p, q] = [met[i]!, met[i + 1]!];

@@ -209,24 +209,53 @@ describe('sections', () => {
     expect(lengths(rear, 'a', 'edge')).toEqual([]);
   });
 
-  it('cut a hollow outline lengthwise in two', () => {
-    const hollow: Solid = {
+  const hollow: Solid = {
+    shape: 'prism',
+    outlineMm: [
+      [0, 0],
+      [100, 0],
+      [100, 100],
+      [80, 100],
+      [80, 20],
+      [20, 20],
+      [20, 100],
+      [0, 100],
+    ],
+    depthMm: 10,
+  };
+
+  it.each([0, 30, 90, 180])('cut a hollow outline lengthwise in two, turned by %s degrees', (turnDeg) => {
+    const turned: Part = { ...part('u', hollow, [0, 0, 0]), rotationRad: [0, (turnDeg * Math.PI) / 180, 0] };
+    const seen = seenLines([turned], { ...front, direction: 'above', sectionMm: 60 });
+    expect(seen.faces).toHaveLength(2);
+    expect(lengths(seen, 'u', 'cut')).toEqual([10, 10, 10, 10, 20, 20, 20, 20]);
+  });
+
+  it('cut a hollow outline in two where rounding parts what lies on one upright of the page', () => {
+    const places = Array.from({ length: 60 }, (_, k) => 3.3 * k);
+    const leaning: Solid = {
       shape: 'prism',
       outlineMm: [
         [0, 0],
         [100, 0],
-        [100, 100],
-        [80, 100],
+        [113.7, 100],
+        [93.1, 100],
         [80, 20],
         [20, 20],
-        [20, 100],
-        [0, 100],
+        [33.3, 100],
+        [11.1, 100],
       ],
       depthMm: 10,
     };
-    const seen = seenLines([part('u', hollow, [0, 0, 0])], { ...front, direction: 'above', sectionMm: 60 });
-    expect(seen.faces).toHaveLength(2);
-    expect(lengths(seen, 'u', 'cut')).toEqual([10, 10, 10, 10, 20, 20, 20, 20]);
+    for (const x of places) {
+      const placed: Part = {
+        ...part('u', leaning, [x, 0, -457.7 - 1.7 * x]),
+        rotationRad: [0, 1.5 * Math.PI, 0],
+      };
+      const { faces } = seenLines([placed], { ...front, direction: 'above', sectionMm: 61.3 });
+      const wide = faces.map(({ points: [a, b] }) => Math.round(Math.abs(a![1] - b![1])));
+      expect(wide.sort((a, b) => a - b)).toEqual([20, 22]);
+    }
   });
 });
 
