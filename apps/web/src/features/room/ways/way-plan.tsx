@@ -6,6 +6,7 @@ import {
   type SetDocument,
   type WayIn,
 } from '@settlewright/geometry';
+import { useMemo } from 'react';
 import { commonScale, DrawingSvg } from '@/components/drawing-svg.tsx';
 import type { NamedComer } from './use-ways-in.ts';
 
@@ -29,7 +30,8 @@ interface Props {
 
 /** The plan with one way in: the line that is walked, the body where it is tightest, floor for a wheelchair dashed. */
 export function WayPlan({ document, way, comer, heightsMm, floor, walker }: Props) {
-  const drawing = planOf(document, { marks: 'none', marginMm: AROUND_MM });
+  // Made once for a document: while somebody walks, the plan is shown anew with every step.
+  const drawing = useMemo(() => planOf(document, { marks: 'none', marginMm: AROUND_MM }), [document]);
   const bands = comer ? standing(comer, heightsMm) : [];
   const tight = way?.tightest;
   const body = (pose: Pose) =>
