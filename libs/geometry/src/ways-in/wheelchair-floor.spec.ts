@@ -53,6 +53,16 @@ describe('floor for a wheelchair', () => {
     expect(shapes.find(({ kind }) => kind === 'toe-space')?.blockedBy).toEqual([]);
   });
 
+  it('lets an apron hang in the knee space where the clause lets it be less deep', () => {
+    // Its underside, 665 mm up, asks for 11 in less a sixth of what it is over 9 in: 206.7 mm.
+    const kneesAt = (insetMm: number) =>
+      floorOf([table({ topThicknessMm: 40, apron: { heightMm: 55, insetMm } })]).find(
+        ({ kind }) => kind === 'knee-space',
+      )?.blockedBy;
+    expect(kneesAt(220)).toEqual([]);
+    expect(kneesAt(200)).toEqual(['T1']);
+  });
+
   it('lies at the end of an accessible bench, and is not asked of others', () => {
     const bench = piece('bench', 'B1', [0, 0, 0], { accessible: true, lengthMm: 1200 });
     const wall = piece('bulkhead', 'W1', [800, 0, -90], { lengthMm: 3000, heightMm: 2000 });

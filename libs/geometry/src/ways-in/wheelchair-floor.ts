@@ -1,4 +1,4 @@
-import { ruleNumber, type RuleBook } from '@settlewright/anthropometry';
+import { kneeDepthNeededMm, ruleNumber, type RuleBook } from '@settlewright/anthropometry';
 import { benchLayout } from '../pieces/bench-layout.ts';
 import type { PieceOf, SetDocument } from '../room/document.ts';
 import { clipped, outOfFrame, type PlanFrame, type PlanOutline } from '../situation/plan.ts';
@@ -17,7 +17,7 @@ export interface FloorShape {
   outline: PlanOutline;
   widthMm: number;
   lengthMm: number;
-  /** Heights that have to be clear. */
+  /** Heights that have to be clear; knee space is less deep higher up, as its clause has it. */
   heightsMm: readonly [number, number];
   ruleId: string;
   clause: string;
@@ -64,13 +64,16 @@ function shapeMaker(found: Survey, ruleBook: Pick<RuleBook, 'rule'>) {
     clauseOf,
     named,
     overHeadsMm,
-    /** A rectangle in a frame, with what stands in it at its heights. */
+    /** How deep knees reach under what begins at a height: less the higher it is. */
+    kneesUnder: (bottomMm: number) => kneeDepthNeededMm(ruleBook.rule('ACC-06'), bottomMm),
+    /** A rectangle in a frame, with what stands in it at its heights; `farUnder` where it is less deep under some things. */
     rectangle: (
       kind: FloorKind,
       ruleId: string,
       plan: PlanFrame,
       window: Window,
       heightsMm: readonly [number, number] = [0, overHeadsMm],
+      farUnder: (bottomMm: number) => number = () => window.ahead[1],
     ): FloorShape => {
       const { left, ahead } = window;
       const inside = solidsNear(
@@ -79,7 +82,10 @@ function shapeMaker(found: Survey, ruleBook: Pick<RuleBook, 'rule'>) {
         Infinity,
         () => true,
         ({ bottomMm, topMm }) => bottomMm < heightsMm[1] && topMm > heightsMm[0],
-      ).filter(({ outline }) => clipped(outline, window).length > 0);
+      ).filter(
+        ({ outline, bottomMm }) =>
+          clipped(outline, { left, ahead: [ahead[0], farUnder(bottomMm)] }).length > 0,
+      );
       return {
         kind,
         outline: outOfFrame(
@@ -118,7 +124,11 @@ function edgesOf(table: PieceOf<'table'>): PlanFrame[] {
   });
 }
 
-function atTable({ number, rectangle }: Maker, table: PieceOf<'table'>, edge: PlanFrame): FloorShape[] {
+function atTable(
+  { number, rectangle, kneesUnder }: Maker,
+  table: PieceOf<'table'>,
+  edge: PlanFrame,
+): FloorShape[] {
   const [width, length] = [number('ACC-04', 'width'), number('ACC-04', 'length')];
   const [kneeFrom, kneeTo] = [number('ACC-06', 'kneeFrom'), number('ACC-06', 'kneeTo')];
   const [knee, toe] = [number('ACC-06', 'kneeDepthAtFrom'), number('ACC-06', 'toeLower')];
@@ -136,7 +146,10 @@ function atTable({ number, rectangle }: Maker, table: PieceOf<'table'>, edge: Pl
       }),
       ...of,
     },
-    { ...rectangle('knee-space', 'ACC-06', edge, { left, ahead: [0, knee] }, [kneeFrom, kneeTo]), ...of },
+    {
+      ...rectangle('knee-space', 'ACC-06', edge, { left, ahead: [0, knee] }, [kneeFrom, kneeTo], kneesUnder),
+      ...of,
+    },
     { ...rectangle('toe-space', 'ACC-06', edge, { left, ahead: [0, toe] }, [0, kneeFrom]), ...of },
   ];
 }
