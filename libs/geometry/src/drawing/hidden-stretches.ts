@@ -70,7 +70,10 @@ export function hiddenStretches(from: Vec3, to: Vec3, solids: readonly ConvexSol
     if (solid.max[2] < deepest || solid.min[0] > high[0]! || solid.max[0] < low[0]!) continue;
     if (solid.min[1] > high[1]! || solid.max[1] < low[1]!) continue;
     const hidden = hiddenBy(solid, from, direction, length);
-    if (hidden) found.push(hidden);
+    if (!hidden) continue;
+    // Nothing is left to hide: what one solid covers whole needs no other.
+    if (hidden[0] <= 0 && hidden[1] >= length) return [hidden];
+    found.push(hidden);
   }
   return union(found, SHORTEST_MM);
 }

@@ -3,6 +3,7 @@ import { cutFaces } from './cut-faces.ts';
 import type { PagePoint } from './drawing.ts';
 import { boxAround } from './page-box.ts';
 import { hiddenStretches, SHORTEST_MM } from './hidden-stretches.ts';
+import { hidersOf, type Hiders } from './hiders.ts';
 import { without } from './intervals.ts';
 import { lineTracks, type PageArc, type PageLine } from './line-tracks.ts';
 import { onPage, pageFrame, sectionDepth, type SetView } from './set-view.ts';
@@ -61,7 +62,11 @@ function bordersOf(
 }
 
 /** The stretches of a circle that are hidden, found on a figure of 64 sides. */
-function hiddenArc({ centre, radiusMm }: PageCircle, solids: readonly ConvexSolid[]) {
+function hiddenArc({ centre, radiusMm }: PageCircle, hiders: Hiders) {
+  const solids = hiders(
+    [centre[0] - radiusMm, centre[1] - radiusMm, centre[2]],
+    [centre[0] + radiusMm, centre[1] + radiusMm, centre[2]],
+  );
   const at = (n: number): Vec3 => {
     const angle = (2 * Math.PI * n) / ARC_STEPS;
     return [centre[0] + radiusMm * Math.cos(angle), centre[1] + radiusMm * Math.sin(angle), centre[2]];
@@ -98,18 +103,18 @@ export function seenLines(
   const nearest = (convex: readonly ConvexSolid[], n: 'min' | 'max') =>
     n === 'min' ? Math.min(...convex.map(({ min }) => min[2])) : Math.max(...convex.map(({ max }) => max[2]));
   const kept = solids.filter(({ convex }) => nearest(convex, 'min') < depth);
-  const hiders: ConvexSolid[] = kept.flatMap(({ convex }) =>
-    convex
-      .filter(({ min }) => min[2] < depth)
-      .map((one) =>
-        one.max[2] <= depth
-          ? one
-          : {
-              sides: [...one.sides, { normal: [0, 0, 1] as Vec3, limit: depth }],
-              min: one.min,
-              max: [one.max[0], one.max[1], depth] as Vec3,
-            },
-      ),
+  const behind = (one: ConvexSolid): ConvexSolid =>
+    one.max[2] <= depth
+      ? one
+      : {
+          sides: [...one.sides, { normal: [0, 0, 1], limit: depth }],
+          min: one.min,
+          max: [one.max[0], one.max[1], depth],
+        };
+  const hiders = hidersOf(
+    kept.flatMap(({ part, convex }) =>
+      convex.filter(({ min }) => min[2] < depth).map((one) => [part.pieceId, behind(one)] as const),
+    ),
   );
   const tracks = lineTracks<LineOf>();
   const known = new Map<string, LineOf>();
@@ -138,7 +143,7 @@ export function seenLines(
         a[0] + ((b[0] - a[0]) * mm) / length,
         a[1] + ((b[1] - a[1]) * mm) / length,
       ];
-      const away = hiddenStretches(a, b, hiders);
+      const away = hiddenStretches(a, b, hiders(a, b));
       const ink = onBorder(part.pieceId, at(0), at(length)) ? edgeInk : seen;
       for (const [from, to] of without([[0, length]], away, SHORTEST_MM)) {
         tracks.addLine(at(from), at(to), ink);
