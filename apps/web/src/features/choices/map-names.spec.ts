@@ -2,8 +2,13 @@ import type { MapRegion } from '@settlewright/geometry';
 import { describe, expect, it } from 'vitest';
 import { mapNames, outlineOf } from './map-names.ts';
 
-const region = (name: string, rooms: number[][]): MapRegion =>
-  ({ sitterId: name, placeId: name, name, rooms, states: [] });
+const region = (name: string, rooms: number[][]): MapRegion => ({
+  sitterId: name,
+  placeId: name,
+  name,
+  rooms,
+  states: [],
+});
 
 const FRAME = { left: 0, right: 300, top: 0, bottom: 200 };
 const placeOf = (across: number, up: number): [number, number] => [across * 100, 200 - up * 100];
