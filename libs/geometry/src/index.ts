@@ -32,7 +32,7 @@ export * from './situation/suggest-fixes.ts';
 export * from './situation/room-for.ts';
 export * from './situation/route-starts.ts';
 export type { Spot } from './situation/clear-floor.ts';
-export type { FigureMeans } from './mannequin/figure.ts';
+export { FIGURE_KEYS, type FigureMeans } from './mannequin/figure.ts';
 export type { MannequinJoints } from './mannequin/joints.ts';
 export { MANNEQUIN_TAGS, mannequinMesh, type MannequinDetail, type MannequinMesh } from './mannequin/mesh.ts';
 export { bodyRange, ghostMeshes, type BodyRange } from './mannequin/body-range.ts';

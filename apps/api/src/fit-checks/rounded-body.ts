@@ -1,35 +1,10 @@
 import type { KnownPerson, MeasureKey } from '@settlewright/anthropometry';
+import { FIGURE_KEYS } from '@settlewright/geometry';
 
 const STEP_MM = 20;
 
 /** What shapes a drawn body, but for the weight: of the rest nothing is sent. */
-export const DRAWN_MEASURES = [
-  'stature',
-  'sitting_height',
-  'eye_height_sitting',
-  'acromial_height_sitting',
-  'elbow_rest_height',
-  'popliteal_height',
-  'knee_height_sitting',
-  'buttock_popliteal_length',
-  'buttock_knee_length',
-  'thigh_clearance',
-  'hip_breadth_sitting',
-  'bideltoid_breadth',
-  'forearm_forearm_breadth',
-  'biacromial_breadth',
-  'abdominal_extension_depth_sitting',
-  'chest_depth',
-  'foot_length',
-  'foot_breadth',
-  'forearm_hand_length',
-  'head_breadth',
-  'head_length',
-  'hand_length',
-  'lateral_malleolus_height',
-  'chest_breadth',
-  'waist_breadth',
-] as const satisfies readonly MeasureKey[];
+const DRAWN_MEASURES = FIGURE_KEYS.filter((key) => key !== 'weight_kg');
 
 /** A body good enough to draw and too coarse to be somebody's measures. */
 export interface RoundedBody {
