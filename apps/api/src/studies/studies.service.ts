@@ -1,10 +1,11 @@
 import { Injectable } from '@nestjs/common';
 import { InjectRepository } from '@nestjs/typeorm';
-import { type EntityManager, In, type Repository, type SelectQueryBuilder } from 'typeorm';
+import type { EntityManager, Repository } from 'typeorm';
 import { AuditService } from '../audit/audit.service';
 import type { MemberInfo } from '../common/access.decorator';
 import { Problem } from '../common/problem';
 import { InjectSettings, type Settings } from '../config/settings';
+import { countUnfinished, lastJobs, oneJob } from '../jobs/document-jobs';
 import { UNFINISHED } from '../jobs/job-states';
 import { WorkVersion } from '../jobs/work-version';
 import { PopulationsService } from '../populations/populations.service';
@@ -22,7 +23,6 @@ import { blocksOf, type StudyQuestion } from './study-question';
 import { StudyQueue } from './study-queue';
 import { toldPopulation } from './told-population';
 
-const LISTED = 20;
 /** So that one workshop does not keep the others waiting. */
 const MOST_UNFINISHED = 5;
 
@@ -69,19 +69,12 @@ export class StudiesService {
 
   async list(member: MemberInfo, productionId: string, setId: string): Promise<Study[]> {
     await this.access.forReading(member, productionId, setId);
-    return this.shown(['question', 'result'])
-      .where('study.setId = :setId', { setId })
-      .orderBy('study.startedAt', 'DESC')
-      .addOrderBy('study.id')
-      .take(LISTED)
-      .getMany();
+    return lastJobs(this.studies, setId, ['question', 'result']);
   }
 
   async find(member: MemberInfo, productionId: string, setId: string, id: string): Promise<Study> {
     await this.access.forReading(member, productionId, setId);
-    const study = await this.shown(['question'])
-      .where('study.id = :id AND study.setId = :setId', { id, setId })
-      .getOne();
+    const study = await oneJob(this.studies, { setId, id }, ['question']);
     if (!study) throw Problem.notFound('study');
     return study;
   }
@@ -159,15 +152,6 @@ export class StudiesService {
     });
   }
 
-  private shown(without: (keyof Study)[]): SelectQueryBuilder<Study> {
-    const columns = this.studies.metadata.columns.map(({ propertyName }) => propertyName as keyof Study);
-    return this.studies
-      .createQueryBuilder('study')
-      .select(columns.filter((column) => !without.includes(column)).map((column) => `study.${column}`))
-      .leftJoin('study.startedBy', 'starter')
-      .addSelect(['starter.id', 'starter.name']);
-  }
-
   private record(
     manager: EntityManager,
     { workshopId, userId }: MemberInfo,
@@ -183,13 +167,7 @@ export class StudiesService {
 /** Part of the caller's transaction. Who starts a study keeps the workshop, so that two at once are counted one by one. */
 async function refuseTooMany(manager: EntityManager, workshopId: string): Promise<void> {
   await manager.query('SELECT 1 FROM workshops WHERE id = $1 FOR NO KEY UPDATE', [workshopId]);
-  const unfinished = await manager
-    .createQueryBuilder(Study, 'study')
-    .innerJoin('study.set', 'set')
-    .innerJoin('set.production', 'production')
-    .where('production.workshopId = :workshopId', { workshopId })
-    .andWhere({ state: In([...UNFINISHED]) })
-    .getCount();
+  const unfinished = await countUnfinished(manager, Study, workshopId);
   if (unfinished < MOST_UNFINISHED) return;
   const detail = `${unfinished} studies of this workshop are not done yet; accepted: up to ${MOST_UNFINISHED} at a time.`;
   throw Problem.conflict('too-many-studies', detail);

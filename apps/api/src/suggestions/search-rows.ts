@@ -1,14 +1,12 @@
-import { type EntityManager, In } from 'typeorm';
+import type { EntityManager } from 'typeorm';
 import type { MemberInfo } from '../common/access.decorator';
 import { Problem } from '../common/problem';
-import { UNFINISHED } from '../jobs/job-states';
+import { countUnfinished, LISTED } from '../jobs/document-jobs';
 import { toldPopulation } from '../studies/told-population';
 import type { StartSuggestionDto } from './dto/start-suggestion.dto';
 import { DimensionSearch } from './entities/dimension-search.entity';
 import type { SearchQuestion, ToldDimension, ToldSitter } from './search-question';
 
-/** Searches of one set that are kept and listed. */
-export const LISTED = 20;
 /** So that one workshop does not keep the others waiting. */
 const MOST_UNFINISHED = 5;
 const WHOLE = 100;
@@ -53,13 +51,7 @@ export function begunSearch(
  * too many are not done; of the set's ended ones, the oldest go.
  */
 export async function makeRoom(manager: EntityManager, workshopId: string, setId: string): Promise<void> {
-  const unfinished = await manager
-    .createQueryBuilder(DimensionSearch, 'search')
-    .innerJoin('search.set', 'set')
-    .innerJoin('set.production', 'production')
-    .where('production.workshopId = :workshopId', { workshopId })
-    .andWhere({ state: In([...UNFINISHED]) })
-    .getCount();
+  const unfinished = await countUnfinished(manager, DimensionSearch, workshopId);
   if (unfinished >= MOST_UNFINISHED) {
     const detail = `${unfinished} searches of this workshop are not done yet; accepted: up to ${MOST_UNFINISHED} at a time.`;
     throw Problem.conflict('too-many-searches', detail);

@@ -1,7 +1,7 @@
 import { lengthStep } from '@settlewright/geometry';
 import { Injectable } from '@nestjs/common';
 import { InjectRepository } from '@nestjs/typeorm';
-import { type EntityManager, In, type Repository, type SelectQueryBuilder } from 'typeorm';
+import { type EntityManager, In, type Repository } from 'typeorm';
 import { AuditService } from '../audit/audit.service';
 import { CastService } from '../cast/cast.service';
 import { castPerson } from '../cast/known-person';
@@ -9,6 +9,7 @@ import type { MemberInfo } from '../common/access.decorator';
 import { Problem } from '../common/problem';
 import { FitCheckService } from '../fit-checks/fit-check.service';
 import { digest } from '../fit-checks/recent-answers';
+import { lastJobs, oneJob } from '../jobs/document-jobs';
 import { UNFINISHED } from '../jobs/job-states';
 import { WorkVersion } from '../jobs/work-version';
 import { PopulationsService } from '../populations/populations.service';
@@ -22,7 +23,7 @@ import type { StartSuggestionDto } from './dto/start-suggestion.dto';
 import { ListedSuggestionDto, SuggestionDto } from './dto/suggestion.dto';
 import { DimensionSearch } from './entities/dimension-search.entity';
 import { readSearch } from './read-search';
-import { begunSearch, LISTED, makeRoom } from './search-rows';
+import { begunSearch, makeRoom } from './search-rows';
 import { locked, SearchParts } from './search-parts.service';
 import { SearchQueue } from './search-queue';
 
@@ -88,21 +89,14 @@ export class SuggestionsService {
 
   async list(member: MemberInfo, productionId: string, setId: string): Promise<ListedSuggestionDto[]> {
     await this.access.forReading(member, productionId, setId);
-    const found = await this.shown(['question', 'found'])
-      .where('search.setId = :setId', { setId })
-      .orderBy('search.startedAt', 'DESC')
-      .addOrderBy('search.id')
-      .take(LISTED)
-      .getMany();
+    const found = await lastJobs(this.searches, setId, ['question', 'found']);
     const names = await this.names(productionId, found);
     return found.map((search) => ListedSuggestionDto.of(search, names));
   }
 
   async get(member: MemberInfo, productionId: string, setId: string, id: string): Promise<SuggestionDto> {
     await this.access.forReading(member, productionId, setId);
-    const search = await this.shown(['question'])
-      .where('search.id = :id AND search.setId = :setId', { id, setId })
-      .getOne();
+    const search = await oneJob(this.searches, { setId, id }, ['question']);
     if (!search) throw Problem.notFound('search for dimensions');
     return SuggestionDto.for(member, search, await this.names(productionId, [search]));
   }
@@ -130,17 +124,6 @@ export class SuggestionsService {
       await manager.delete(DimensionSearch, { id });
       await this.record(manager, member, 'suggestion.removed', id);
     });
-  }
-
-  private shown(without: (keyof DimensionSearch)[]): SelectQueryBuilder<DimensionSearch> {
-    const columns = this.searches.metadata.columns.map(
-      ({ propertyName }) => propertyName as keyof DimensionSearch,
-    );
-    return this.searches
-      .createQueryBuilder('search')
-      .select(columns.filter((column) => !without.includes(column)).map((column) => `search.${column}`))
-      .leftJoin('search.startedBy', 'starter')
-      .addSelect(['starter.id', 'starter.name']);
   }
 
   /** As the cast has them now: an erased person is no longer named. */

@@ -2558,19 +2558,11 @@ export interface components {
             id: string;
             /** @enum {string} */
             state: "queued" | "running" | "done" | "cancelled" | "failed";
-            progress: components["schemas"]["StudyProgressDto"];
             /** @description of the document; either this or `revisionLetter` */
             draftNumber?: number;
             revisionLetter?: string;
-            population: components["schemas"]["ToldPopulationDto"];
             /** @description women of 100 people; absent for a population of one sex */
             womenPercent?: number;
-            people: number;
-            seed: number;
-            /** @description absent: all */
-            ruleIds?: string[];
-            /** @description absent: all */
-            placeIds?: string[];
             ruleVersion: string;
             startedBy: components["schemas"]["PersonDto"];
             /** Format: date-time */
@@ -2579,6 +2571,14 @@ export interface components {
             endedAt?: string;
             /** @description why it failed */
             fault?: string;
+            progress: components["schemas"]["StudyProgressDto"];
+            population: components["schemas"]["ToldPopulationDto"];
+            people: number;
+            seed: number;
+            /** @description absent: all */
+            ruleIds?: string[];
+            /** @description absent: all */
+            placeIds?: string[];
             /** @description ShareOutcome of the anthropometry library: all ticked rules at all ticked places */
             outcome?: {
                 [key: string]: unknown;
@@ -2613,19 +2613,11 @@ export interface components {
             id: string;
             /** @enum {string} */
             state: "queued" | "running" | "done" | "cancelled" | "failed";
-            progress: components["schemas"]["StudyProgressDto"];
             /** @description of the document; either this or `revisionLetter` */
             draftNumber?: number;
             revisionLetter?: string;
-            population: components["schemas"]["ToldPopulationDto"];
             /** @description women of 100 people; absent for a population of one sex */
             womenPercent?: number;
-            people: number;
-            seed: number;
-            /** @description absent: all */
-            ruleIds?: string[];
-            /** @description absent: all */
-            placeIds?: string[];
             ruleVersion: string;
             startedBy: components["schemas"]["PersonDto"];
             /** Format: date-time */
@@ -2634,6 +2626,14 @@ export interface components {
             endedAt?: string;
             /** @description why it failed */
             fault?: string;
+            progress: components["schemas"]["StudyProgressDto"];
+            population: components["schemas"]["ToldPopulationDto"];
+            people: number;
+            seed: number;
+            /** @description absent: all */
+            ruleIds?: string[];
+            /** @description absent: all */
+            placeIds?: string[];
             /** @description ShareOutcome of the anthropometry library: all ticked rules at all ticked places */
             outcome?: {
                 [key: string]: unknown;
@@ -2694,15 +2694,9 @@ export interface components {
             id: string;
             /** @enum {string} */
             state: "queued" | "running" | "done" | "cancelled" | "failed";
-            progress: components["schemas"]["SearchProgressDto"];
             /** @description of the document; either this or `revisionLetter` */
             draftNumber?: number;
             revisionLetter?: string;
-            free: components["schemas"]["FreeDimensionDto"][];
-            /** @description who must be served */
-            served: components["schemas"]["ServedDto"][];
-            /** @description of whom as many as can be are served then */
-            population?: components["schemas"]["ToldPopulationDto"];
             /** @description women of 100 people; absent for a population of one sex */
             womenPercent?: number;
             ruleVersion: string;
@@ -2713,6 +2707,12 @@ export interface components {
             endedAt?: string;
             /** @description why it failed */
             fault?: string;
+            progress: components["schemas"]["SearchProgressDto"];
+            free: components["schemas"]["FreeDimensionDto"][];
+            /** @description who must be served */
+            served: components["schemas"]["ServedDto"][];
+            /** @description of whom as many as can be are served then */
+            population?: components["schemas"]["ToldPopulationDto"];
         };
         SuggestionListDto: {
             /** @description the last 20, newest first */
@@ -2828,15 +2828,9 @@ export interface components {
             id: string;
             /** @enum {string} */
             state: "queued" | "running" | "done" | "cancelled" | "failed";
-            progress: components["schemas"]["SearchProgressDto"];
             /** @description of the document; either this or `revisionLetter` */
             draftNumber?: number;
             revisionLetter?: string;
-            free: components["schemas"]["FreeDimensionDto"][];
-            /** @description who must be served */
-            served: components["schemas"]["ServedDto"][];
-            /** @description of whom as many as can be are served then */
-            population?: components["schemas"]["ToldPopulationDto"];
             /** @description women of 100 people; absent for a population of one sex */
             womenPercent?: number;
             ruleVersion: string;
@@ -2847,6 +2841,12 @@ export interface components {
             endedAt?: string;
             /** @description why it failed */
             fault?: string;
+            progress: components["schemas"]["SearchProgressDto"];
+            free: components["schemas"]["FreeDimensionDto"][];
+            /** @description who must be served */
+            served: components["schemas"]["ServedDto"][];
+            /** @description of whom as many as can be are served then */
+            population?: components["schemas"]["ToldPopulationDto"];
             /** @description the set as it is; absent where the ranges leave it out */
             present?: components["schemas"]["ChoiceDto"];
             /** @description found so far; up to three that differ */

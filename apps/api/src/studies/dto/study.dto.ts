@@ -2,8 +2,7 @@ import type { PopulationKind, ShareOutcome } from '@settlewright/anthropometry';
 import { ApiProperty, ApiPropertyOptional } from '@nestjs/swagger';
 import { seesMeasures } from '../../cast/sees-measures';
 import type { MemberInfo } from '../../common/access.decorator';
-import { PersonDto } from '../../sets/dto/person.dto';
-import { JOB_STATES, type JobState } from '../../jobs/job-states';
+import { DocumentJobDto, documentJobFields } from '../../jobs/dto/document-job.dto';
 import type { Study } from '../entities/study.entity';
 import type { StudyResult } from '../study-question';
 
@@ -29,21 +28,11 @@ export class StudyProgressDto {
   done: number;
 }
 
-export class ListedStudyDto {
-  @ApiProperty({ format: 'uuid' })
-  id: string;
-  @ApiProperty({ enum: JOB_STATES })
-  state: JobState;
+export class ListedStudyDto extends DocumentJobDto {
   @ApiProperty({ type: StudyProgressDto })
   progress: StudyProgressDto;
-  @ApiPropertyOptional({ description: 'of the document; either this or `revisionLetter`' })
-  draftNumber?: number;
-  @ApiPropertyOptional()
-  revisionLetter?: string;
   @ApiProperty({ type: ToldPopulationDto })
   population: ToldPopulationDto;
-  @ApiPropertyOptional({ description: 'women of 100 people; absent for a population of one sex' })
-  womenPercent?: number;
   @ApiProperty()
   people: number;
   @ApiProperty()
@@ -52,16 +41,6 @@ export class ListedStudyDto {
   ruleIds?: string[];
   @ApiPropertyOptional({ type: [String], description: 'absent: all' })
   placeIds?: string[];
-  @ApiProperty()
-  ruleVersion: string;
-  @ApiProperty({ type: PersonDto })
-  startedBy: PersonDto;
-  @ApiProperty({ format: 'date-time' })
-  startedAt: string;
-  @ApiPropertyOptional({ format: 'date-time' })
-  endedAt?: string;
-  @ApiPropertyOptional({ description: 'why it failed' })
-  fault?: string;
   @ApiPropertyOptional({
     type: 'object',
     additionalProperties: true,
@@ -70,25 +49,15 @@ export class ListedStudyDto {
   outcome?: ShareOutcome;
 
   static of(study: Study): ListedStudyDto {
-    const { id, state, draftNumber, revisionLetter, womenPercent, ruleIds, placeIds, fault, outcome } = study;
-    const { population, people, seed, ruleVersion, endedAt } = study;
+    const { blocks, blocksDone, population, people, seed, ruleIds, placeIds, outcome } = study;
     return {
-      id,
-      state,
-      progress: { blocks: study.blocks, done: study.blocksDone },
-      ...(draftNumber === null ? {} : { draftNumber }),
-      ...(revisionLetter === null ? {} : { revisionLetter }),
+      ...documentJobFields(study),
+      progress: { blocks, done: blocksDone },
       population,
-      ...(womenPercent === null ? {} : { womenPercent }),
       people,
       seed,
       ...(ruleIds ? { ruleIds } : {}),
       ...(placeIds ? { placeIds } : {}),
-      ruleVersion,
-      startedBy: PersonDto.of(study.startedById, study.startedBy),
-      startedAt: study.startedAt.toISOString(),
-      ...(endedAt ? { endedAt: endedAt.toISOString() } : {}),
-      ...(fault === null ? {} : { fault }),
       ...(outcome ? { outcome } : {}),
     };
   }

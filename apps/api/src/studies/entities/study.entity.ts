@@ -1,46 +1,15 @@
 import type { ShareOutcome } from '@settlewright/anthropometry';
-import {
-  Column,
-  CreateDateColumn,
-  Entity,
-  Index,
-  JoinColumn,
-  ManyToOne,
-  PrimaryGeneratedColumn,
-  type Relation,
-} from 'typeorm';
-import type { JobState } from '../../jobs/job-states';
-import { DesignedSet } from '../../sets/entities/designed-set.entity';
-import { User } from '../../users/entities/user.entity';
+import { Column, Entity, Index } from 'typeorm';
+import { DocumentJob } from '../../jobs/entities/document-job.entity';
 import type { StudyQuestion, StudyResult } from '../study-question';
 import type { ToldPopulation } from '../told-population';
 
 /** How many people of a population one document of a set fits. */
 @Entity('studies')
 @Index(['setId', 'startedAt'])
-export class Study {
-  @PrimaryGeneratedColumn('uuid')
-  id: string;
-
-  @Column('uuid')
-  setId: string;
-
-  @ManyToOne(() => DesignedSet, { nullable: false, onDelete: 'CASCADE' })
-  @JoinColumn({ name: 'set_id' })
-  set?: Relation<DesignedSet>;
-
-  /** The document: a draft or a revision. */
-  @Column({ type: 'integer', nullable: true })
-  draftNumber: number | null;
-
-  @Column({ type: 'text', nullable: true })
-  revisionLetter: string | null;
-
+export class Study extends DocumentJob {
   @Column('jsonb')
   population: ToldPopulation;
-
-  @Column({ type: 'double precision', nullable: true })
-  womenPercent: number | null;
 
   @Column('integer')
   people: number;
@@ -54,12 +23,6 @@ export class Study {
 
   @Column({ type: 'text', array: true, nullable: true })
   placeIds: string[] | null;
-
-  @Column('text')
-  ruleVersion: string;
-
-  @Column('text')
-  state: JobState;
 
   @Column('integer')
   blocks: number;
@@ -77,21 +40,4 @@ export class Study {
   /** The share of all ticked rules at once, for lists. */
   @Column({ type: 'jsonb', nullable: true })
   outcome: ShareOutcome | null;
-
-  /** Why it failed, in words. */
-  @Column({ type: 'text', nullable: true })
-  fault: string | null;
-
-  @Column('uuid')
-  startedById: string;
-
-  @ManyToOne(() => User, { nullable: false })
-  @JoinColumn({ name: 'started_by_id' })
-  startedBy?: Relation<User>;
-
-  @CreateDateColumn({ type: 'timestamptz' })
-  startedAt: Date;
-
-  @Column({ type: 'timestamptz', nullable: true })
-  endedAt: Date | null;
 }

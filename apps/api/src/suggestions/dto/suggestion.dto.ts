@@ -2,8 +2,7 @@ import type { AnswerKind, CellState, Dimension } from '@settlewright/geometry';
 import { ApiProperty, ApiPropertyOptional } from '@nestjs/swagger';
 import { seesMeasures } from '../../cast/sees-measures';
 import type { MemberInfo } from '../../common/access.decorator';
-import { JOB_STATES, type JobState } from '../../jobs/job-states';
-import { PersonDto } from '../../sets/dto/person.dto';
+import { DocumentJobDto, documentJobFields } from '../../jobs/dto/document-job.dto';
 import { ToldPopulationDto } from '../../studies/dto/study.dto';
 import type { DimensionSearch } from '../entities/dimension-search.entity';
 import type { KeptTried, ToldDimension, ToldSitter } from '../search-question';
@@ -53,53 +52,24 @@ export class SearchProgressDto {
   of: number;
 }
 
-export class ListedSuggestionDto {
-  @ApiProperty({ format: 'uuid' })
-  id: string;
-  @ApiProperty({ enum: JOB_STATES })
-  state: JobState;
+export class ListedSuggestionDto extends DocumentJobDto {
   @ApiProperty({ type: SearchProgressDto })
   progress: SearchProgressDto;
-  @ApiPropertyOptional({ description: 'of the document; either this or `revisionLetter`' })
-  draftNumber?: number;
-  @ApiPropertyOptional()
-  revisionLetter?: string;
   @ApiProperty({ type: [FreeDimensionDto] })
   free: FreeDimensionDto[];
   @ApiProperty({ type: [ServedDto], description: 'who must be served' })
   served: ServedDto[];
   @ApiPropertyOptional({ type: ToldPopulationDto, description: 'of whom as many as can be are served then' })
   population?: ToldPopulationDto;
-  @ApiPropertyOptional({ description: 'women of 100 people; absent for a population of one sex' })
-  womenPercent?: number;
-  @ApiProperty()
-  ruleVersion: string;
-  @ApiProperty({ type: PersonDto })
-  startedBy: PersonDto;
-  @ApiProperty({ format: 'date-time' })
-  startedAt: string;
-  @ApiPropertyOptional({ format: 'date-time' })
-  endedAt?: string;
-  @ApiPropertyOptional({ description: 'why it failed' })
-  fault?: string;
 
   static of(search: DimensionSearch, names: ReadonlyMap<string, string>): ListedSuggestionDto {
-    const { id, state, done, most, draftNumber, revisionLetter, population, womenPercent, fault } = search;
+    const { done, most, free, served, population } = search;
     return {
-      id,
-      state,
+      ...documentJobFields(search),
       progress: { done, of: most },
-      ...(draftNumber === null ? {} : { draftNumber }),
-      ...(revisionLetter === null ? {} : { revisionLetter }),
-      free: search.free,
-      served: search.served.map((one) => ({ sitterId: one.id, name: nameOf(one, names) })),
+      free,
+      served: served.map((one) => ({ sitterId: one.id, name: nameOf(one, names) })),
       ...(population ? { population } : {}),
-      ...(womenPercent === null ? {} : { womenPercent }),
-      ruleVersion: search.ruleVersion,
-      startedBy: PersonDto.of(search.startedById, search.startedBy),
-      startedAt: search.startedAt.toISOString(),
-      ...(search.endedAt ? { endedAt: search.endedAt.toISOString() } : {}),
-      ...(fault === null ? {} : { fault }),
     };
   }
 }

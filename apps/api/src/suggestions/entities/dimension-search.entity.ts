@@ -1,40 +1,12 @@
-import {
-  Column,
-  CreateDateColumn,
-  Entity,
-  Index,
-  JoinColumn,
-  ManyToOne,
-  PrimaryGeneratedColumn,
-  type Relation,
-} from 'typeorm';
-import type { JobState } from '../../jobs/job-states';
-import { DesignedSet } from '../../sets/entities/designed-set.entity';
+import { Column, Entity, Index } from 'typeorm';
+import { DocumentJob } from '../../jobs/entities/document-job.entity';
 import type { ToldPopulation } from '../../studies/told-population';
-import { User } from '../../users/entities/user.entity';
 import type { Found, SearchQuestion, ToldDimension, ToldSitter } from '../search-question';
 
 /** A search for the dimensions that serve everybody named, and then most of a population, in one document of a set. */
 @Entity('dimension_searches')
 @Index(['setId', 'startedAt'])
-export class DimensionSearch {
-  @PrimaryGeneratedColumn('uuid')
-  id: string;
-
-  @Column('uuid')
-  setId: string;
-
-  @ManyToOne(() => DesignedSet, { nullable: false, onDelete: 'CASCADE' })
-  @JoinColumn({ name: 'set_id' })
-  set?: Relation<DesignedSet>;
-
-  /** The document: a draft or a revision. */
-  @Column({ type: 'integer', nullable: true })
-  draftNumber: number | null;
-
-  @Column({ type: 'text', nullable: true })
-  revisionLetter: string | null;
-
+export class DimensionSearch extends DocumentJob {
   @Column('jsonb')
   free: ToldDimension[];
 
@@ -44,15 +16,6 @@ export class DimensionSearch {
   /** Null: nobody besides those who are named. */
   @Column({ type: 'jsonb', nullable: true })
   population: ToldPopulation | null;
-
-  @Column({ type: 'double precision', nullable: true })
-  womenPercent: number | null;
-
-  @Column('text')
-  ruleVersion: string;
-
-  @Column('text')
-  state: JobState;
 
   /** Choices tried, of at most how many. */
   @Column('integer')
@@ -75,21 +38,4 @@ export class DimensionSearch {
 
   @Column({ type: 'json', nullable: true })
   found: Found | null;
-
-  /** Why it failed, in words. */
-  @Column({ type: 'text', nullable: true })
-  fault: string | null;
-
-  @Column('uuid')
-  startedById: string;
-
-  @ManyToOne(() => User, { nullable: false })
-  @JoinColumn({ name: 'started_by_id' })
-  startedBy?: Relation<User>;
-
-  @CreateDateColumn({ type: 'timestamptz' })
-  startedAt: Date;
-
-  @Column({ type: 'timestamptz', nullable: true })
-  endedAt: Date | null;
 }
