@@ -22,7 +22,7 @@ import type {
   DocumentChangeDto,
   TurnedCheckDto,
 } from './dto/comparison.dto';
-import { versionState } from './version-state';
+import { versionState } from './answer-fields';
 import { type Version, VersionsService } from './versions.service';
 
 type Found = Version & { sheet: FitSheet; setId: string };
@@ -100,10 +100,10 @@ function marginOf<Key extends 'marginBefore' | 'marginAfter'>(
   return { [key]: cell.outcome.margin } as Record<Key, number>;
 }
 
-const versionOf = ({ setId, setName, sheet, ...version }: Found): ComparedVersionDto => ({
+const versionOf = ({ setId, setName, state, sheet }: Found): ComparedVersionDto => ({
   setId,
   setName,
-  ...versionState({ ...version, setName }),
+  ...versionState({ state }),
   counts: sheet.counts,
   confidence: sheet.confidence,
   ruleVersion: sheet.ruleVersion,

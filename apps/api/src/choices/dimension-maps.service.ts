@@ -13,17 +13,15 @@ import { seesMeasures } from '../cast/sees-measures';
 import type { MemberInfo } from '../common/access.decorator';
 import { Problem } from '../common/problem';
 import { FitCheckService } from '../fit-checks/fit-check.service';
-import { CAUTION } from '../fit-checks/shown-sheet';
 import { ProductionsService } from '../productions/productions.service';
 import { RateLimits } from '../rate-limits/rate-limits.service';
+import { answerFields } from './answer-fields';
 import { CrowdShares } from './crowd-shares.service';
 import type { AskMapDto } from './dto/asked.dto';
 import type { DimensionMapDto } from './dto/dimension-map.dto';
 import { DimensionDto } from './dto/story-stick.dto';
-import { shownRules } from './shown-rules';
 import { COARSE, fine, type Fineness, readDimension } from './tried-dimension';
 import { inTurns, refuseTooMuch } from './trying';
-import { versionState } from './version-state';
 import { type Version, type VersionPlace, VersionsService } from './versions.service';
 
 /** Two numbers of a set tried against each other, by the functions that the browser uses. */
@@ -57,7 +55,7 @@ export class DimensionMaps {
     const present = { across: across.value, up: up.value };
     return {
       detail: fineness === COARSE ? 'verdicts' : 'full',
-      version: versionState(version),
+      ...answerFields(version, this.fit.ruleBook, map.ruleIds),
       across: DimensionDto.of(across),
       up: DimensionDto.of(up),
       acrossValues: map.across,
@@ -69,10 +67,6 @@ export class DimensionMaps {
         ...pair,
         ...(share === undefined ? {} : { share }),
       })),
-      rules: shownRules(this.fit.ruleBook, map.ruleIds),
-      confidence: version.confidence ?? this.fit.ruleBook.confidence,
-      ruleVersion: this.fit.ruleBook.version,
-      caution: CAUTION,
     };
   }
 
@@ -103,11 +97,10 @@ function readBoth(document: SetDocument, asked: AskMapDto): { across: Dimension;
     const message = `read "${asked.up}", as across; accepted: another number of the set`;
     throw Problem.invalid([{ path: 'up', code: 'same-dimension', message }]);
   }
-  readDimension(document, { dimension: asked.up }, 'up');
+  const up = readDimension(document, { dimension: asked.up }, 'up');
   // From the same set as the first number, as the browser does.
   const base = across.at(across.value) ?? document;
-  const up = dimensionOf(base, asked.up) ?? readDimension(document, { dimension: asked.up }, 'up');
-  return { across, up };
+  return { across, up: dimensionOf(base, asked.up) ?? up };
 }
 
 /**

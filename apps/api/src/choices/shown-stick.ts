@@ -28,8 +28,6 @@ export interface ShownStick extends Pick<
   /** Worst verdict of each row at the value. */
   atValue: { placeId: string; state: CellState }[];
   shares?: { told: CrowdTold; points: ValueShare[]; joint: ValueShare[] };
-  confidence: number;
-  ruleVersion: string;
 }
 
 type Answers = Pick<ShownStick, 'values' | 'rows' | 'allFit' | 'allTight'>;

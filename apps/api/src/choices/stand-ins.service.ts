@@ -6,10 +6,8 @@ import { readMeasured } from '../cast/measured';
 import type { MemberInfo } from '../common/access.decorator';
 import { Problem, type ProblemField } from '../common/problem';
 import { FitCheckService } from '../fit-checks/fit-check.service';
-import { CAUTION } from '../fit-checks/shown-sheet';
+import { answerFields } from './answer-fields';
 import type { AskStandInDto, StandInDto, StrangerDto } from './dto/stand-in.dto';
-import { shownRules } from './shown-rules';
-import { versionState } from './version-state';
 import { type Version, type VersionPlace, VersionsService } from './versions.service';
 
 const SHOE_MM = 25;
@@ -35,15 +33,11 @@ export class StandInsService {
     const { ruleBook } = this.fit;
     const told = checks.filter(({ answer }) => answer !== 'notAsked').map(({ ruleId }) => ruleId);
     return {
-      version: versionState(version),
+      ...answerFields(version, ruleBook, told),
       placeId: asked.placeId,
       castId: castMember.id,
       checks,
       littleSaidMm: ruleBook.standIn.littleSaidMm,
-      rules: shownRules(ruleBook, told),
-      confidence: version.confidence ?? ruleBook.confidence,
-      ruleVersion: ruleBook.version,
-      caution: CAUTION,
     };
   }
 

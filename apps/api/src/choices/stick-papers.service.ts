@@ -1,18 +1,17 @@
 import { Injectable } from '@nestjs/common';
 import type { MemberInfo } from '../common/access.decorator';
 import { FitCheckService } from '../fit-checks/fit-check.service';
-import { CAUTION, type ConfidenceSince, confidenceSentence } from '../fit-checks/shown-sheet';
+import { type ConfidenceSince, confidenceSentence } from '../fit-checks/shown-sheet';
 import { ProductionsService } from '../productions/productions.service';
 import { WorkshopsService } from '../workshops/workshops.service';
+import { answerFields } from './answer-fields';
 import type { AskStickDto } from './dto/asked.dto';
 import { DimensionDto, type StoryStickDto } from './dto/story-stick.dto';
 import { EVERY_RULE } from './every-rule';
 import { stickPdf } from './paper/stick-pdf';
-import { shownRules } from './shown-rules';
 import type { ShownStick } from './shown-stick';
 import { StorySticks } from './story-sticks.service';
-import { versionState } from './version-state';
-import type { VersionPlace } from './versions.service';
+import type { Version, VersionPlace } from './versions.service';
 
 /** Story sticks as answers and on paper. */
 @Injectable()
@@ -29,11 +28,9 @@ export class StickPapers {
     const { dimension, shares, ...shown } = stick;
     return {
       ...shown,
-      version: versionState(version),
+      ...this.fields(version, stick),
       dimension: DimensionDto.of(dimension),
       ...(shares ? { shares: { population: shares.told, points: shares.points, joint: shares.joint } } : {}),
-      rules: this.rules(stick),
-      caution: CAUTION,
     };
   }
 
@@ -50,9 +47,10 @@ export class StickPapers {
       version.state.kind === 'revision'
         ? { kind: 'issued', at: version.at }
         : confidenceSetAt && { kind: 'set', at: confidenceSetAt };
+    const fields = this.fields(version, stick);
     const content = stickPdf({
       stick,
-      rules: this.rules(stick),
+      rules: fields.rules,
       style,
       paper: workshop.paper,
       timeZone,
@@ -62,13 +60,14 @@ export class StickPapers {
       state: version.state,
       at: version.at,
       by: version.by,
-      confidence: confidenceSentence(stick, this.fit.ruleBook, since, timeZone),
+      confidence: confidenceSentence(fields, this.fit.ruleBook, since, timeZone),
     });
     return { name: `${version.setName} ${stick.dimension.label} story stick`, content };
   }
 
-  private rules({ shownRule, ruleIds, clauses }: ShownStick) {
+  private fields(version: Version, { shownRule, ruleIds, clauses }: ShownStick) {
     const ofSitters = shownRule === EVERY_RULE ? ruleIds : [shownRule];
-    return shownRules(this.fit.ruleBook, [...ofSitters, ...clauses.map(({ ruleId }) => ruleId)]);
+    const told = [...ofSitters, ...clauses.map(({ ruleId }) => ruleId)];
+    return answerFields(version, this.fit.ruleBook, told);
   }
 }

@@ -111,8 +111,6 @@ export class StorySticks {
       bands: stickBands(made, this.fit.ruleBook, style),
       value,
       atValue: answers.rows.map(({ placeId }) => ({ placeId, state: stateAt(sheet, placeId, shown) })),
-      confidence: sheet.confidence,
-      ruleVersion: sheet.ruleVersion,
     };
   }
 

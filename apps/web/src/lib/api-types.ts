@@ -2894,6 +2894,19 @@ export interface components {
             /** @description of an issued revision */
             revisionLetter?: string;
         };
+        RuleSourceDto: {
+            cite: string;
+            /** @description how it was read, as `read in the source` or `from memory` */
+            read: string;
+        };
+        ShownRuleDto: {
+            id: string;
+            name: string;
+            why: string;
+            /** @description what its numbers rest on */
+            sourceWord: string;
+            sources: components["schemas"]["RuleSourceDto"][];
+        };
         DimensionDto: {
             id: string;
             label: string;
@@ -2975,26 +2988,16 @@ export interface components {
             /** @description of every rule of a person at once */
             joint: components["schemas"]["ValueShareDto"][];
         };
-        RuleSourceDto: {
-            cite: string;
-            /** @description how it was read, as `read in the source` or `from memory` */
-            read: string;
-        };
-        ShownRuleDto: {
-            id: string;
-            name: string;
-            why: string;
-            /** @description what its numbers rest on */
-            sourceWord: string;
-            sources: components["schemas"]["RuleSourceDto"][];
-        };
         StoryStickDto: {
+            version: components["schemas"]["VersionStateDto"];
+            rules: components["schemas"]["ShownRuleDto"][];
+            ruleVersion: string;
+            caution: string;
             /**
              * @description `verdicts` for who sees no measures: values in the steps and the reach of shown margins, stretches by verdicts
              * @enum {string}
              */
             detail: "full" | "verdicts";
-            version: components["schemas"]["VersionStateDto"];
             dimension: components["schemas"]["DimensionDto"];
             /** @description step by which the number is chosen, in its unit */
             step: number;
@@ -3017,11 +3020,8 @@ export interface components {
             /** @description worst verdict of each row at that value */
             atValue: components["schemas"]["StickAnswerDto"][];
             shares?: components["schemas"]["StickSharesDto"];
-            rules: components["schemas"]["ShownRuleDto"][];
             /** @description probability from which verdicts are given */
             confidence: number;
-            ruleVersion: string;
-            caution: string;
         };
         AskMapDto: {
             /** @description whose shares are counted: one that comes with the product, as `us-civilians-2015`, or one of the workshop’s own; no shares when absent */
@@ -3075,9 +3075,12 @@ export interface components {
             share?: number;
         };
         DimensionMapDto: {
+            version: components["schemas"]["VersionStateDto"];
+            rules: components["schemas"]["ShownRuleDto"][];
+            ruleVersion: string;
+            caution: string;
             /** @enum {string} */
             detail: "full" | "verdicts";
-            version: components["schemas"]["VersionStateDto"];
             across: components["schemas"]["DimensionDto"];
             up: components["schemas"]["DimensionDto"];
             acrossValues: number[];
@@ -3088,10 +3091,7 @@ export interface components {
             shares?: components["schemas"]["MapSharesDto"];
             /** @description pairs that serve most sitters, then most of the people, then lie nearest to the present */
             best: components["schemas"]["BestPairDto"][];
-            rules: components["schemas"]["ShownRuleDto"][];
             confidence: number;
-            ruleVersion: string;
-            caution: string;
         };
         AskedVersionDto: {
             /**
@@ -3348,16 +3348,16 @@ export interface components {
         };
         StandInDto: {
             version: components["schemas"]["VersionStateDto"];
+            rules: components["schemas"]["ShownRuleDto"][];
+            ruleVersion: string;
+            caution: string;
             placeId: string;
             /** Format: uuid */
             castId: string;
             checks: components["schemas"]["StandInCheckDto"][];
             /** @description difference of two bodies beyond which a sit says little */
             littleSaidMm: number;
-            rules: components["schemas"]["ShownRuleDto"][];
             confidence: number;
-            ruleVersion: string;
-            caution: string;
         };
         UpholstererDto: {
             /** Format: uuid */

@@ -13,7 +13,7 @@ import {
 } from 'class-validator';
 import { MayBeLeftOut } from '../../common/may-be-left-out';
 import { CountsDto } from '../../sets/dto/fit-sheet.dto';
-import { VersionStateDto } from './story-stick.dto';
+import { VersionStateDto } from './choice-answer.dto';
 
 const LETTER_MAX = 12;
 

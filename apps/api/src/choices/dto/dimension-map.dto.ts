@@ -1,6 +1,7 @@
 import type { BestPair, MapRegion } from '@settlewright/geometry';
 import { ApiProperty, ApiPropertyOptional } from '@nestjs/swagger';
-import { CrowdDto, DimensionDto, ShownRuleDto, VersionStateDto } from './story-stick.dto';
+import { ChoiceAnswerDto } from './choice-answer.dto';
+import { CrowdDto, DimensionDto } from './story-stick.dto';
 
 const grid = (items: Record<string, unknown>) => ({
   type: 'array' as const,
@@ -50,11 +51,9 @@ export class BestPairDto implements Omit<BestPair, 'share'> {
 }
 
 /** Two numbers of a set against each other, as far as the reader may see it. */
-export class DimensionMapDto {
+export class DimensionMapDto extends ChoiceAnswerDto {
   @ApiProperty({ enum: ['full', 'verdicts'] })
   detail: 'full' | 'verdicts';
-  @ApiProperty({ type: VersionStateDto })
-  version: VersionStateDto;
   @ApiProperty({ type: DimensionDto })
   across: DimensionDto;
   @ApiProperty({ type: DimensionDto })
@@ -74,12 +73,6 @@ export class DimensionMapDto {
     description: 'pairs that serve most sitters, then most of the people, then lie nearest to the present',
   })
   best: BestPairDto[];
-  @ApiProperty({ type: [ShownRuleDto] })
-  rules: ShownRuleDto[];
   @ApiProperty()
   confidence: number;
-  @ApiProperty()
-  ruleVersion: string;
-  @ApiProperty()
-  caution: string;
 }

@@ -4,7 +4,7 @@ import { Type } from 'class-transformer';
 import { IsInt, IsObject, IsString, IsUUID, MaxLength, Min, ValidateNested } from 'class-validator';
 import { MayBeLeftOut } from '../../common/may-be-left-out';
 import { CreateCastMemberDto } from '../../cast/dto/save-cast-member.dto';
-import { ShownRuleDto, VersionStateDto } from './story-stick.dto';
+import { ChoiceAnswerDto } from './choice-answer.dto';
 
 const PLACE_MAX = 120;
 
@@ -114,9 +114,7 @@ export class StandInCheckDto implements StandInCheck {
   take?: TakeDto;
 }
 
-export class StandInDto {
-  @ApiProperty({ type: VersionStateDto })
-  version: VersionStateDto;
+export class StandInDto extends ChoiceAnswerDto {
   @ApiProperty()
   placeId: string;
   @ApiProperty({ format: 'uuid' })
@@ -125,12 +123,6 @@ export class StandInDto {
   checks: StandInCheckDto[];
   @ApiProperty({ description: 'difference of two bodies beyond which a sit says little' })
   littleSaidMm: number;
-  @ApiProperty({ type: [ShownRuleDto] })
-  rules: ShownRuleDto[];
   @ApiProperty()
   confidence: number;
-  @ApiProperty()
-  ruleVersion: string;
-  @ApiProperty()
-  caution: string;
 }

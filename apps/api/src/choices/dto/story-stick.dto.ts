@@ -1,17 +1,10 @@
 import type { Dimension } from '@settlewright/geometry';
 import { ApiProperty, ApiPropertyOptional } from '@nestjs/swagger';
 import type { CrowdTold, ValueShare } from '../crowd-shares.service';
-import type { ShownRule } from '../shown-rules';
 import type { ShownRow, ShownStick } from '../shown-stick';
+import { ChoiceAnswerDto } from './choice-answer.dto';
 
 const STATES = ['fits', 'tight', 'wontFit', 'notKnown', 'gone'];
-
-export class VersionStateDto {
-  @ApiPropertyOptional({ description: 'of a draft' })
-  draftNumber?: number;
-  @ApiPropertyOptional({ description: 'of an issued revision' })
-  revisionLetter?: string;
-}
 
 export class DimensionDto implements Omit<Dimension, 'at'> {
   @ApiProperty()
@@ -114,26 +107,6 @@ export class StickBandDto {
   stretches: StretchDto[];
 }
 
-export class RuleSourceDto {
-  @ApiProperty()
-  cite: string;
-  @ApiProperty({ description: 'how it was read, as `read in the source` or `from memory`' })
-  read: string;
-}
-
-export class ShownRuleDto implements ShownRule {
-  @ApiProperty()
-  id: string;
-  @ApiProperty()
-  name: string;
-  @ApiProperty()
-  why: string;
-  @ApiProperty({ description: 'what its numbers rest on' })
-  sourceWord: string;
-  @ApiProperty({ type: [RuleSourceDto] })
-  sources: RuleSourceDto[];
-}
-
 export class CrowdDto implements CrowdTold {
   @ApiProperty()
   id: string;
@@ -172,15 +145,13 @@ export class StickSharesDto {
 }
 
 /** Where each sitter fits along one number of a set, as far as its reader may see it. */
-export class StoryStickDto {
+export class StoryStickDto extends ChoiceAnswerDto {
   @ApiProperty({
     enum: ['full', 'verdicts'],
     description:
       '`verdicts` for who sees no measures: values in the steps and the reach of shown margins, stretches by verdicts',
   })
   detail: ShownStick['detail'];
-  @ApiProperty({ type: VersionStateDto })
-  version: VersionStateDto;
   @ApiProperty({ type: DimensionDto })
   dimension: DimensionDto;
   @ApiProperty({ description: 'step by which the number is chosen, in its unit' })
@@ -210,12 +181,6 @@ export class StoryStickDto {
   atValue: StickAnswerDto[];
   @ApiPropertyOptional({ type: StickSharesDto })
   shares?: StickSharesDto;
-  @ApiProperty({ type: [ShownRuleDto] })
-  rules: ShownRuleDto[];
   @ApiProperty({ description: 'probability from which verdicts are given' })
   confidence: number;
-  @ApiProperty()
-  ruleVersion: string;
-  @ApiProperty()
-  caution: string;
 }
