@@ -4,6 +4,7 @@ import { tmpdir } from 'node:os';
 import { join } from 'node:path';
 import { ARRANGEMENTS, dimensionOf, type LengthStyle, type SetDocument } from '@settlewright/geometry';
 import { afterAll, beforeAll, describe, expect, it } from '@jest/globals';
+import { paperWords, type PlacedWord } from '../../../test/factories/papers';
 import type { Paper } from '../../paper/pack';
 import type { ShownStick } from '../shown-stick';
 import { stickPdf } from './stick-pdf';
@@ -63,8 +64,6 @@ function paper(size: Paper, style: LengthStyle, tried = value + 6): Buffer {
     value: tried,
     atValue: rows.map(({ placeId }) => ({ placeId, state: 'notKnown' })),
     shares: { told, points, joint: points },
-    confidence: 0.9,
-    ruleVersion: '1',
   };
   const rule = { id: 'SEAT-02', name: 'Seat height', why: '', sourceWord: 'from memory', sources: [] };
   return stickPdf({
@@ -83,15 +82,6 @@ function paper(size: Paper, style: LengthStyle, tried = value + 6): Buffer {
   });
 }
 
-interface Box {
-  word: string;
-  page: number;
-  left: number;
-  top: number;
-  right: number;
-  foot: number;
-}
-
 describe.each([
   ['a4', METRIC, '841.89 x 595.27', 'mm'],
   ['letter', INCHES, '792 x 612', '″'],
@@ -102,40 +92,21 @@ describe.each([
   beforeAll(() => writeFileSync(file, paper(size, style)));
   afterAll(() => rmSync(folder, { recursive: true }));
 
-  function boxes(): Box[] {
-    const html = run('pdftotext', '-bbox', file, '-');
-    return html
-      .split('<page ')
-      .slice(1)
-      .flatMap((page, n) =>
-        [...page.matchAll(/xMin="([\d.]+)" yMin="([\d.]+)" xMax="([\d.]+)" yMax="([\d.]+)">([^<]+)</g)].map(
-          ([, left, top, right, foot, word]) => ({
-            word: word ?? '',
-            page: n,
-            left: Number(left),
-            top: Number(top),
-            right: Number(right),
-            foot: Number(foot),
-          }),
-        ),
-      );
-  }
-
-  it('overprints nothing, with twelve long names', () => {
-    const found = boxes();
+  it('overprints nothing, with twelve long names', async () => {
+    const found = await paperWords(paper(size, style));
     // Boxes hold the whole height of a face, so that lines close to each other touch by a little.
-    const middleOf = ({ top, foot }: Box) => (top + foot) / 2;
+    const middleOf = ({ yMin, yMax }: PlacedWord) => (yMin + yMax) / 2;
     const clashes = found.flatMap((a, i) =>
       found
         .slice(i + 1)
         .filter(
           (b) =>
             a.page === b.page &&
-            a.left < b.right - 0.5 &&
-            b.left < a.right - 0.5 &&
+            a.xMin < b.xMax - 0.5 &&
+            b.xMin < a.xMax - 0.5 &&
             Math.abs(middleOf(a) - middleOf(b)) < 7,
         )
-        .map((b) => `${a.word} / ${b.word}`),
+        .map((b) => `${a.text} / ${b.text}`),
     );
     expect(found.length).toBeGreaterThan(100);
     expect(clashes).toEqual([]);
