@@ -38,6 +38,8 @@ describe('margins in words', () => {
 
   it('writes values and limits plainly', () => {
     expect(valueWords(-2, 'deg', inches)).toBe('−2°');
+    expect(valueWords(-0.2, 'mm', inches)).toBe('0″');
+    expect(plain(valueWords(-0.2, 'mm', metric))).toBe('0 mm');
     expect(valueWords(609.6, 'mm', inches)).toBe('24″');
   });
 });

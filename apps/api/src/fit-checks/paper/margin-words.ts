@@ -29,7 +29,8 @@ export function marginWords({ margin, marginRange }: Margin, unit: RuleUnit, sty
 
 /** A value or limit of a rule. */
 export function valueWords(value: number, unit: RuleUnit, style: LengthStyle): string {
-  return (value < 0 ? '−' : '') + amount(Math.abs(value), 0, unit, style);
+  const words = amount(Math.abs(value), 0, unit, style);
+  return (value < 0 && words !== amount(0, 0, unit, style) ? '−' : '') + words;
 }
 
 function amount(value: number, half: number, unit: RuleUnit, style: LengthStyle): string {
