@@ -21,7 +21,7 @@ import { readPalette } from '../scene/palette.ts';
 import { freeSpace, pdfOf, sheetsOf, type PaperKey } from './pdf-sheets.ts';
 import { loadSheetFonts } from './sheet-fonts.ts';
 import { takeStill } from './still.ts';
-import { CUT_WORDS, fileName, usualCut, usualScale, VIEW_CHOICES } from './views-to-save.ts';
+import { CUT_WORDS, fileName, usualCut, usualScale, VIEW_CHOICES, viewName } from './views-to-save.ts';
 
 const FILES = [
   { value: 'pdf', words: 'PDF to print, to scale' },
@@ -108,12 +108,7 @@ export default function SaveDrawing({ onClose }: { onClose: () => void }) {
     setBusy(true);
     setProblem(null);
     try {
-      const name = isDrawing
-        ? fileName(setName, view, kind)
-        : fileName(setName, { ...view, direction: 'front', sectionMm: undefined }, kind).replace(
-            '-front.',
-            '.',
-          );
+      const name = fileName(isDrawing ? [setName, viewName(view)] : [setName], kind);
       keepFile(new Blob([await contents()], { type: TYPES[kind] }), name);
       announce(`${name} is saved.`);
     } catch (error) {

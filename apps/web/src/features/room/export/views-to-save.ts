@@ -24,7 +24,6 @@ export const CUT_WORDS: Record<ViewDirection, string> = {
 };
 
 const EYE_OF_PLAN_MM = 1219.2;
-const STEP_MM = 1;
 
 /** Where a set is cut when nothing was said: a plan at four feet, an elevation through the middle of its pieces. */
 export function usualCut(document: SetDocument, direction: ViewDirection): number {
@@ -33,17 +32,22 @@ export function usualCut(document: SetDocument, direction: ViewDirection): numbe
   const pieces = document.pieces.filter(({ kind }) => kind !== 'bulkhead' && kind !== 'sill');
   const places = pieces.flatMap((piece) => footprint(piece).corners.map((corner) => corner[axis]));
   if (places.length === 0) return 0;
-  return Math.round((Math.min(...places) + Math.max(...places)) / 2 / STEP_MM) * STEP_MM;
+  return Math.round((Math.min(...places) + Math.max(...places)) / 2);
 }
 
 /** A scale to start from: one that shows a room on a sheet or two. */
 export const usualScale = (system: LengthStyle['system']): number => (system === 'millimetres' ? 20 : 24);
 
-/** The name of a file: the set, the view, nothing that a disk would refuse. */
-export function fileName(setName: string, view: SetView, ending: string): string {
-  const direction = view.direction === 'above' ? 'plan' : view.direction;
-  const words = [setName, view.sectionMm === undefined ? direction : `${direction} section`].join(' ');
+/** "plan", "front section": how a view is called in the name of its file. */
+export function viewName({ direction, sectionMm }: Pick<SetView, 'direction' | 'sectionMm'>): string {
+  const from = direction === 'above' ? 'plan' : direction;
+  return sectionMm === undefined ? from : `${from} section`;
+}
+
+/** The name of a file: the set and what is shown of it, nothing that a disk would refuse. */
+export function fileName(words: readonly string[], ending: string): string {
   const plain = words
+    .join(' ')
     .normalize('NFKD')
     .replace(/[^\p{L}\p{N} -]/gu, '')
     .trim()
