@@ -17,6 +17,9 @@ export function dayWords(iso: string | undefined | null): string {
   return date.getFullYear() === new Date().getFullYear() ? DAY.format(date) : DAY_AND_YEAR.format(date);
 }
 
+/** "2 December 2026", as a paper that is kept says when it was made. */
+export const todayWords = (): string => DAY_AND_YEAR.format(new Date());
+
 /** "10:42". */
 export function timeWords(iso: string | undefined | null): string {
   const date = read(iso);

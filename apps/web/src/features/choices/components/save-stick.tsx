@@ -2,6 +2,7 @@ import type { Dimension } from '@settlewright/geometry';
 import { memo, useState, type RefObject } from 'react';
 import { Button } from '@/components/button.tsx';
 import { CAUTION } from '@/lib/caution.ts';
+import { todayWords } from '@/lib/dates.ts';
 import { useProduction } from '@/lib/production.ts';
 import { UNIT_WORDS } from '@/lib/unit-choice.ts';
 import { useChoices } from '../choices-view.ts';
@@ -16,8 +17,6 @@ interface SaveStickProps {
   /** What the server's drawing shows. */
   asked: StickPaper;
 }
-
-const DAY = new Intl.DateTimeFormat('en-GB', { day: 'numeric', month: 'long', year: 'numeric' });
 
 /** The stick as a file to send on, with all that tells what it is: a picture made here, or the server's PDF. */
 export const SaveStick = memo(function SaveStick({ drawing, dimension, words, asked }: SaveStickProps) {
@@ -34,7 +33,7 @@ export const SaveStick = memo(function SaveStick({ drawing, dimension, words, as
       title: dimension.label,
       above: [
         movingWords(dimension),
-        `${production}, ${setName}. Draft ${draft}. ${DAY.format(new Date())}. Lengths in ${UNIT_WORDS[style.system]}.`,
+        `${production}, ${setName}. Draft ${draft}. ${todayWords()}. Lengths in ${UNIT_WORDS[style.system]}.`,
       ],
       below: [...words.filter(Boolean), CAUTION],
     });

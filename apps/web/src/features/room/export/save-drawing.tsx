@@ -14,6 +14,7 @@ import { Notice } from '@/components/notice.tsx';
 import { entryOf, type QuantityEntry } from '@/components/quantity-entry.ts';
 import { Select } from '@/components/select.tsx';
 import { announce } from '@/lib/announce.ts';
+import { todayWords } from '@/lib/dates.ts';
 import { keepFile } from '@/lib/download.ts';
 import { Toggle } from '../components/toggle.tsx';
 import { usePicture, useSurroundings } from '../room-context.tsx';
@@ -87,7 +88,7 @@ export default function SaveDrawing({ onClose }: { onClose: () => void }) {
       case 'dxf':
         return dxfOf(drawing, style.system === 'millimetres' ? 'millimetres' : 'inches');
       case 'pdf': {
-        const version = `Draft, ${new Date().toLocaleDateString('en-GB', { dateStyle: 'long' })}`;
+        const version = `Draft, ${todayWords()}`;
         return pdfOf(drawing, { setName, version, style }, paper, await loadSheetFonts());
       }
       case 'png': {
