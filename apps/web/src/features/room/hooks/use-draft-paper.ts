@@ -1,6 +1,7 @@
 import { useCallback } from 'react';
 import { download } from '@/lib/download';
 import { Problem } from '@/lib/problem';
+import { setAddress } from '../api.ts';
 import { useAutosave, useSurroundings } from '../room-context.tsx';
 import { DraftNotSaved, savedDraft } from '../save/saved-draft.ts';
 
@@ -9,13 +10,12 @@ export type DraftPaper = (paper: string, asked: Readonly<Record<string, unknown>
 
 export function useDraftPaper(): DraftPaper {
   const autosave = useAutosave();
-  const { workshopId, productionId, setId } = useSurroundings().path;
+  const { path } = useSurroundings();
   return useCallback(
     async (paper, asked) => {
       const draftNumber = await savedDraft(autosave);
-      const at = `/workshops/${workshopId}/productions/${productionId}/sets/${setId}/draft/${paper}`;
       try {
-        await download(at, undefined, { ...asked, draftNumber });
+        await download(`${setAddress(path)}/draft/${paper}`, undefined, { ...asked, draftNumber });
       } catch (error) {
         if (error instanceof Problem && error.code === 'draft-moved-on') {
           throw new DraftNotSaved(
@@ -25,6 +25,6 @@ export function useDraftPaper(): DraftPaper {
         throw error;
       }
     },
-    [autosave, workshopId, productionId, setId],
+    [autosave, path],
   );
 }
