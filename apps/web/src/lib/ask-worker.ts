@@ -1,6 +1,22 @@
 /** What a worker answers: the number of the question, and its answer or what went wrong. */
 export type Reply<Answer> = { id: number } & ({ answer: Answer } | { fault: string });
 
+/** What is said of something that was thrown. */
+export const faultWords = (fault: unknown): string =>
+  fault instanceof Error ? fault.message : String(fault);
+
+/** What a worker sends back: what `answer` makes, or why it could not. */
+export async function replyTo<Answer>(
+  id: number,
+  answer: () => Answer | Promise<Answer>,
+): Promise<Reply<Answer>> {
+  try {
+    return { id, answer: await answer() };
+  } catch (fault) {
+    return { id, fault: faultWords(fault) };
+  }
+}
+
 interface Waiting {
   resolve: (answer: never) => void;
   reject: (fault: Error) => void;

@@ -1,5 +1,6 @@
 import { dimensionOf, lengthStep, type Dimension } from '@settlewright/geometry';
 import { useEffect, useMemo, useState } from 'react';
+import { faultWords } from '@/lib/ask-worker.ts';
 import { askCrowd } from '@/lib/crowd/ask-crowd.ts';
 import type { CrowdRequest } from '@/lib/crowd/crowd-people.ts';
 import { castMap, gridValues, type CastMap } from '@settlewright/geometry';
@@ -85,8 +86,7 @@ export function useCastMap(
       ...(lensHeightMm === undefined ? {} : { lensHeightMm }),
     }).then(
       ({ fits }) => current && setCounted({ key, map, shares: fits }),
-      (error: unknown) =>
-        current && setCounted({ key, map, fault: error instanceof Error ? error.message : String(error) }),
+      (error: unknown) => current && setCounted({ key, map, fault: faultWords(error) }),
     );
     return () => {
       current = false;

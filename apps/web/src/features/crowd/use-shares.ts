@@ -1,6 +1,7 @@
 import type { StudyShares } from '@settlewright/anthropometry';
 import { measureSet } from '@settlewright/geometry';
 import { useEffect, useMemo, useState } from 'react';
+import { faultWords } from '@/lib/ask-worker.ts';
 import { askCrowd } from '@/lib/crowd/ask-crowd.ts';
 import type { CrowdRequest } from '@/lib/crowd/crowd-people.ts';
 import type { CrowdTold } from '@/lib/crowd/crowd-tasks.ts';
@@ -44,7 +45,7 @@ export function useShares({ crowd, ruleIds }: Asked): {
           setCounted(places);
         },
         (fault: unknown) => {
-          if (isWanted) setAnswer({ key, fault: fault instanceof Error ? fault.message : String(fault) });
+          if (isWanted) setAnswer({ key, fault: faultWords(fault) });
         },
       );
     }, REST_MS);

@@ -1,4 +1,4 @@
-import type { Reply } from '../ask-worker.ts';
+import { replyTo } from '../ask-worker.ts';
 import { createCrowdDesk } from './crowd-desk.ts';
 import type { CrowdTask, CrowdTasks } from './crowd-tasks.ts';
 
@@ -15,10 +15,6 @@ let turn: Promise<unknown> = Promise.resolve();
 // One after the other: the desk keeps one crowd at a time.
 self.onmessage = ({ data: { id, task, asked } }: MessageEvent<Question>) => {
   turn = turn.then(async () => {
-    const reply: Reply<unknown> = await desk.answer(task, asked).then(
-      (answer) => ({ id, answer }),
-      (fault: unknown) => ({ id, fault: fault instanceof Error ? fault.message : String(fault) }),
-    );
-    self.postMessage(reply);
+    self.postMessage(await replyTo(id, () => desk.answer(task, asked)));
   });
 };

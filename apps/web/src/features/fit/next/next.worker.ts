@@ -1,6 +1,6 @@
-import { createBodyModel, type NextMeasures } from '@settlewright/anthropometry';
+import { createBodyModel } from '@settlewright/anthropometry';
 import summary from '@settlewright/seed-data/populations/ansur2.json';
-import type { Reply } from '@/lib/ask-worker.ts';
+import { replyTo } from '@/lib/ask-worker.ts';
 import { answerNext, type NextQuestion } from './next-question.ts';
 
 export interface NumberedQuestion {
@@ -11,11 +11,5 @@ export interface NumberedQuestion {
 const model = createBodyModel(summary);
 
 self.onmessage = ({ data: { id, question } }: MessageEvent<NumberedQuestion>) => {
-  let reply: Reply<NextMeasures>;
-  try {
-    reply = { id, answer: answerNext(question, model) };
-  } catch (fault) {
-    reply = { id, fault: fault instanceof Error ? fault.message : String(fault) };
-  }
-  self.postMessage(reply);
+  void replyTo(id, () => answerNext(question, model)).then((reply) => self.postMessage(reply));
 };

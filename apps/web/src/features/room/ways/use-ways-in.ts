@@ -1,6 +1,7 @@
 import { ruleNumber } from '@settlewright/anthropometry';
 import type { Comer, SetDocument, WaysIn } from '@settlewright/geometry';
 import { useEffect, useMemo, useState } from 'react';
+import { faultWords } from '@/lib/ask-worker.ts';
 import { useSurroundings } from '../room-context.tsx';
 import { sitterName, sittersOf } from '../sitters.ts';
 import { askWays } from './ask-ways.ts';
@@ -51,8 +52,7 @@ export function useWaysIn(document: SetDocument): WaysFound {
     let wanted = true;
     askWays({ document, comers, heightsMm }, () => wanted).then(
       (found) => wanted && found && setAnswer({ to: comers, found }),
-      (fault: unknown) =>
-        wanted && setAnswer({ to: comers, fault: fault instanceof Error ? fault.message : String(fault) }),
+      (fault: unknown) => wanted && setAnswer({ to: comers, fault: faultWords(fault) }),
     );
     return () => {
       wanted = false;

@@ -1,5 +1,5 @@
-import { findWaysIn, type Comer, type SetDocument, type WaysIn } from '@settlewright/geometry';
-import type { Reply } from '@/lib/ask-worker.ts';
+import { findWaysIn, type Comer, type SetDocument } from '@settlewright/geometry';
+import { replyTo } from '@/lib/ask-worker.ts';
 
 export interface WaysQuestion {
   id: number;
@@ -9,11 +9,5 @@ export interface WaysQuestion {
 }
 
 self.onmessage = ({ data: { id, document, comers, heightsMm } }: MessageEvent<WaysQuestion>) => {
-  let reply: Reply<WaysIn>;
-  try {
-    reply = { id, answer: findWaysIn(document, comers, heightsMm) };
-  } catch (fault) {
-    reply = { id, fault: fault instanceof Error ? fault.message : String(fault) };
-  }
-  self.postMessage(reply);
+  void replyTo(id, () => findWaysIn(document, comers, heightsMm)).then((reply) => self.postMessage(reply));
 };
