@@ -1,4 +1,4 @@
-import type { Ref } from 'react';
+import { useRef, useState, type Ref } from 'react';
 import { TextArea } from './text-field.tsx';
 
 interface ReasonFieldProps {
@@ -11,9 +11,6 @@ interface ReasonFieldProps {
   onChange: (reason: string) => void;
   ref?: Ref<HTMLTextAreaElement>;
 }
-
-/** What is said where a choice against a check is kept and nothing tells why. */
-export const REASON_MISSING = 'Say why it is kept.';
 
 /** Why a choice is kept knowingly: the same words wherever the known differences grow. */
 export function ReasonField({ value, error, optional, behind, onChange, ref }: ReasonFieldProps) {
@@ -31,4 +28,30 @@ export function ReasonField({ value, error, optional, behind, onChange, ref }: R
       onChange={(event) => onChange(event.target.value)}
     />
   );
+}
+
+/** A reason that has to be given: the field asks for it where it is missing once somebody wants to go on. */
+export function useReason() {
+  const [reason, setReason] = useState('');
+  const [asked, setAsked] = useState(false);
+  const ref = useRef<HTMLTextAreaElement>(null);
+  const given = reason.trim();
+  return {
+    field: {
+      ref,
+      value: reason,
+      error: asked && given === '' ? 'Say why it is kept.' : undefined,
+      onChange: setReason,
+    } satisfies ReasonFieldProps,
+    /** The reason, which leaves the field empty; without one nothing, and the field is pointed out. */
+    take: (): string | undefined => {
+      setAsked(given === '');
+      if (given === '') {
+        ref.current?.focus();
+        return undefined;
+      }
+      setReason('');
+      return given;
+    },
+  };
 }

@@ -1,7 +1,7 @@
-import { useRef, useState } from 'react';
+import { useState } from 'react';
 import { Button } from '@/components/button.tsx';
 import { Measure } from '@/components/measure.tsx';
-import { REASON_MISSING, ReasonField } from '@/components/reason-field.tsx';
+import { ReasonField, useReason } from '@/components/reason-field.tsx';
 import { ChoiceLines } from './choice-lines.tsx';
 
 interface KeepChoiceProps {
@@ -15,11 +15,8 @@ interface KeepChoiceProps {
 
 /** Keep the present value for the look, and say in the known differences why. */
 export function KeepChoice({ value, lost, publicWords, difference, onKeep }: KeepChoiceProps) {
-  const [reason, setReason] = useState('');
-  const [asked, setAsked] = useState(false);
+  const { field, take } = useReason();
   const [kept, setKept] = useState<string>();
-  const field = useRef<HTMLTextAreaElement>(null);
-  const isMissing = reason.trim() === '';
   return (
     <section aria-labelledby="keep-heading" className="border-t border-rule pt-3">
       <h2 id="keep-heading" className="mb-1 text-lg font-semibold">
@@ -36,23 +33,13 @@ export function KeepChoice({ value, lost, publicWords, difference, onKeep }: Kee
           noValidate
           onSubmit={(event) => {
             event.preventDefault();
-            setAsked(isMissing);
-            if (isMissing) {
-              field.current?.focus();
-              return;
-            }
-            onKeep(reason.trim());
+            const reason = take();
+            if (reason === undefined) return;
+            onKeep(reason);
             setKept(difference);
-            setReason('');
           }}
         >
-          <ReasonField
-            ref={field}
-            behind={difference}
-            value={reason}
-            error={asked && isMissing ? REASON_MISSING : undefined}
-            onChange={setReason}
-          />
+          <ReasonField behind={difference} {...field} />
           <div className="mt-3 flex flex-wrap items-center gap-x-4 gap-y-2">
             <Button type="submit">
               <span>

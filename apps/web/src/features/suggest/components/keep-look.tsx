@@ -1,6 +1,6 @@
-import { useRef, useState } from 'react';
+import { useState } from 'react';
 import { Button } from '@/components/button.tsx';
-import { REASON_MISSING, ReasonField } from '@/components/reason-field.tsx';
+import { ReasonField, useReason } from '@/components/reason-field.tsx';
 import { RuleHeading } from '@/components/rule-heading.tsx';
 import { TextArea } from '@/components/text-field.tsx';
 import { withKnownDifference } from '@/lib/known-difference.ts';
@@ -15,10 +15,8 @@ export function KeepLook({ moves }: { moves: readonly Move[] }) {
   const by = useSession((state) => state.user?.name);
   const offered = differenceWords(moves, style);
   const [typed, setTyped] = useState<string>();
-  const [reason, setReason] = useState('');
-  const [asked, setAsked] = useState(false);
+  const { field, take } = useReason();
   const [kept, setKept] = useState(false);
-  const field = useRef<HTMLTextAreaElement>(null);
   const text = (typed ?? offered).trim();
   if (!replace) return null;
   return (
@@ -29,16 +27,10 @@ export function KeepLook({ moves }: { moves: readonly Move[] }) {
         onSubmit={(event) => {
           event.preventDefault();
           if (text === '') return;
-          if (reason.trim() === '') {
-            setAsked(true);
-            field.current?.focus();
-            return;
-          }
-          const said = { text, reason: reason.trim(), by };
-          replace(withKnownDifference(document, said), 'Known difference added');
+          const reason = take();
+          if (reason === undefined) return;
+          replace(withKnownDifference(document, { text, reason, by }), 'Known difference added');
           setKept(true);
-          setAsked(false);
-          setReason('');
         }}
       >
         <TextArea
@@ -48,12 +40,7 @@ export function KeepLook({ moves }: { moves: readonly Move[] }) {
           rows={2}
           onChange={(event) => setTyped(event.target.value)}
         />
-        <ReasonField
-          ref={field}
-          value={reason}
-          error={asked && reason.trim() === '' ? REASON_MISSING : undefined}
-          onChange={setReason}
-        />
+        <ReasonField {...field} />
         <div className="flex flex-wrap items-center gap-4">
           <Button type="submit">Keep as it is, with a note</Button>
           {kept && (
