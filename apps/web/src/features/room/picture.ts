@@ -22,7 +22,7 @@ import {
 } from '@settlewright/geometry';
 import type { CastMember } from '@/lib/contract';
 import type { FitEngine } from './engine';
-import { coloursOf, sitterName, sittersOf, UNKNOWN_COLOUR } from './sitters';
+import { coloursOf, sitterName, sittersOf } from './sitters';
 
 /** A body at its place, ready to be drawn. */
 export interface SeatedBody {
@@ -165,7 +165,7 @@ export function createPictureMaker(
     const frames = new Map(
       document.pieces.flatMap((piece) => placeFrames(piece, document)).map((frame) => [frame.placeId, frame]),
     );
-    const colours = coloursOf(document, cast);
+    const colourAt = coloursOf(document, cast);
     return document.seating.flatMap(({ pieceId, place, sitter }): SeatedBody[] => {
       const placeId = `${pieceId}:${place}`;
       const frame = frames.get(placeId);
@@ -180,7 +180,7 @@ export function createPictureMaker(
           placeId,
           pieceId,
           name: sitterName(sitter, cast),
-          colour: colours.get(placeId) ?? UNKNOWN_COLOUR,
+          colour: colourAt(placeId),
           statureMm: body.means.stature,
           estimated: body.estimated,
           pose,

@@ -6,7 +6,7 @@ import { useSetInfo } from './api.ts';
 import { sayDraft } from './hooks/use-room-cells.ts';
 import { useTakeStep } from './hooks/use-take-step.ts';
 import { useAutosave, usePicture, useSurroundings } from './room-context.tsx';
-import { coloursOf, UNKNOWN_COLOUR } from './sitters.ts';
+import { coloursOf } from './sitters.ts';
 
 /** What the story stick needs of the room; the route hands it on, as features do not know each other. */
 export interface RoomForChoices {
@@ -34,7 +34,7 @@ export function useRoomForChoices(): RoomForChoices {
 
   return useMemo(() => {
     const placeOf = new Map(sheet.rows.map((row) => [row.sitterId, row.placeId]));
-    const colours = coloursOf(document, cast);
+    const colourAt = coloursOf(document, cast);
     const bodyOf = new Map(bodies.map((body) => [body.placeId, body]));
     return {
       document,
@@ -43,7 +43,7 @@ export function useRoomForChoices(): RoomForChoices {
       ruleBook: engine.ruleBook,
       style,
       detail,
-      colourOf: (sitterId) => colours.get(placeOf.get(sitterId) ?? '') ?? UNKNOWN_COLOUR,
+      colourOf: (sitterId) => colourAt(placeOf.get(sitterId)),
       aside: (sitterId) => {
         const body = bodyOf.get(placeOf.get(sitterId) ?? '');
         if (!body || detail === 'verdicts') return '';

@@ -19,7 +19,7 @@ import { useMemo } from 'react';
 import { useRoomAddress } from './hooks/use-address.ts';
 import { usePieceActions } from './hooks/use-piece-actions.ts';
 import { usePicture, useSurroundings } from './room-context.tsx';
-import { coloursOf, personOf, sittersOf, UNKNOWN_COLOUR } from './sitters.ts';
+import { coloursOf, personOf, sittersOf } from './sitters.ts';
 import { useRoom, useRoomStore } from './store.ts';
 
 /** What the fit sheet needs of the room; the route hands it on, as features do not know each other. */
@@ -66,7 +66,7 @@ export function useRoomForFit(): RoomForFit {
 
   return useMemo(() => {
     const placeOf = new Map(picture.sheet.rows.map((row) => [row.sitterId, row.placeId]));
-    const colours = coloursOf(picture.document, cast);
+    const colourAt = coloursOf(picture.document, cast);
     const bodyOf = new Map(picture.bodies.map((body) => [body.placeId, body]));
     return {
       document: picture.document,
@@ -75,7 +75,7 @@ export function useRoomForFit(): RoomForFit {
       confidenceSetAt: confidenceSetAt ?? null,
       style,
       detail,
-      colourOf: (sitterId) => colours.get(placeOf.get(sitterId) ?? '') ?? UNKNOWN_COLOUR,
+      colourOf: (sitterId) => colourAt(placeOf.get(sitterId)),
       aside: (sitterId) => {
         const body = bodyOf.get(placeOf.get(sitterId) ?? '');
         if (!body || detail === 'verdicts') return '';

@@ -5,7 +5,7 @@ import { useStore } from 'zustand';
 import { setAddress } from './api.ts';
 import { useTakeStep } from './hooks/use-take-step.ts';
 import { useAutosave, usePicture, useSurroundings } from './room-context.tsx';
-import { coloursOf, sittersOf, UNKNOWN_COLOUR } from './sitters.ts';
+import { coloursOf, sittersOf } from './sitters.ts';
 
 /** What the pages about suggestions and shares need of the room; the route hands it on. */
 export interface RoomForSuggest {
@@ -34,7 +34,7 @@ export function useRoomForSuggest(): RoomForSuggest {
   const take = useTakeStep();
   const draftNumber = useStore(useAutosave().state, (state) => state.base.number);
   return useMemo(() => {
-    const colours = coloursOf(document, cast);
+    const colourAt = coloursOf(document, cast);
     const seated = sittersOf(document, cast, engine.model);
     const sitters = seated.filter(({ noBody }) => !noBody);
     const placeOf = new Map(sheet.rows.map((row) => [row.sitterId, row.placeId]));
@@ -51,7 +51,7 @@ export function useRoomForSuggest(): RoomForSuggest {
       placesWithoutBody: seated.length - sitters.length,
       ruleBook: engine.ruleBook,
       style,
-      colourOf: (sitterId) => colours.get(placeOf.get(sitterId) ?? '') ?? UNKNOWN_COLOUR,
+      colourOf: (sitterId) => colourAt(placeOf.get(sitterId)),
     };
   }, [path, draftNumber, setName, document, sheet, maker, canEdit, take, cast, engine, style]);
 }

@@ -32,11 +32,16 @@ export function sitterName(ref: SitterRef, cast: readonly CastMember[]): string 
 }
 
 /** Of who is no longer found at a place. */
-export const UNKNOWN_COLOUR = 6;
+const UNKNOWN_COLOUR = 6;
 
-/** The colour at each place of a set, all different while there are enough. */
-export const coloursOf = (document: SetDocument, cast: readonly CastMember[]) =>
-  sitterColours(document.seating, (castId) => cast.find((member) => member.id === castId)?.colour);
+/** Tells the colour at a place of a set; all are different while there are enough. */
+export function coloursOf(document: SetDocument, cast: readonly CastMember[]) {
+  const colours = sitterColours(
+    document.seating,
+    (castId) => cast.find((member) => member.id === castId)?.colour,
+  );
+  return (placeId = ''): number => colours.get(placeId) ?? UNKNOWN_COLOUR;
+}
 
 /** What the checks know of a cast member; `undefined` when this reader may not see measures. */
 export function personOf(member: CastMember): KnownPerson | undefined {
