@@ -46,8 +46,7 @@ interface Input {
 
 /** Who gains and who loses between two sheets, by name. */
 export function effectsOf({ before, after, ruleIds, moving, ruleBook, style }: Input): Effects {
-  const names = new Map(before.rows.map(({ sitterId, name }) => [sitterId, shortName(name)]));
-  const whoOf = ({ sitterId, marks }: CellChange) => names.get(sitterId ?? '') ?? joinWords(marks);
+  const whoOf = whoIn(before);
   const checkOf = (change: CellChange) => checkName(change, ruleBook);
   const changes = sheetChanges(before, after);
   const alone = ruleIds.size === 1;
@@ -84,6 +83,12 @@ export function effectsOf({ before, after, ruleIds, moving, ruleBook, style }: I
   };
 }
 
+/** Tells whom a change is about: a sitter's short name, or the marks of the pieces. */
+export function whoIn({ rows }: FitSheet): (change: CellChange) => string {
+  const names = new Map(rows.map(({ sitterId, name }) => [sitterId, shortName(name)]));
+  return ({ sitterId, marks }) => names.get(sitterId ?? '') ?? joinWords(marks);
+}
+
 const speaks = ({ outcome: { kind } }: FitSheet['piecesAndWays'][number]): boolean =>
   kind === 'verdict' || kind === 'clause';
 
@@ -112,7 +117,8 @@ function unknownIn(sheet: FitSheet, ruleIds: ReadonlySet<string>, ruleBook: Rule
   });
 }
 
-const checkName = ({ ruleId }: Pick<CellChange, 'ruleId'>, ruleBook: RuleBook): string =>
+/** "seat height": how a check is called inside a sentence. */
+export const checkName = ({ ruleId }: Pick<CellChange, 'ruleId'>, ruleBook: RuleBook): string =>
   ruleBook.rule(ruleId).columnName.toLowerCase();
 
 /** Changes that are said in one line, with everybody whom they touch. */

@@ -1,7 +1,7 @@
 import type { FitSheet, RuleBook } from '@settlewright/anthropometry';
 import { isLoss, sheetChanges, type BestPair, type CellChange, type CellState } from '@settlewright/geometry';
 import { joinWords } from '@/lib/dimension-words.ts';
-import { shortName } from '@/lib/short-name.ts';
+import { checkName, whoIn } from './effects.ts';
 
 /** A pair of values, and whom it costs a verdict by any check. */
 export interface PricedPair extends BestPair {
@@ -20,7 +20,7 @@ export function pricedPairs(
   sheetAt: (pair: BestPair) => FitSheet | undefined,
   ruleBook: RuleBook,
 ): PricedPair[] {
-  const names = new Map(before.rows.map(({ sitterId, name }) => [sitterId, shortName(name)]));
+  const whoOf = whoIn(before);
   return pairs
     .flatMap((pair): PricedPair[] => {
       const after = sheetAt(pair);
@@ -28,9 +28,9 @@ export function pricedPairs(
       const losses = sheetChanges(before, after).filter(isLoss);
       const away = losses.filter(isAway);
       const byWho = new Map<string, string[]>();
-      for (const { sitterId, marks, ruleId } of away) {
-        const who = names.get(sitterId ?? '') ?? joinWords(marks);
-        byWho.set(who, [...(byWho.get(who) ?? []), ruleBook.rule(ruleId).columnName.toLowerCase()]);
+      for (const change of away) {
+        const who = whoOf(change);
+        byWho.set(who, [...(byWho.get(who) ?? []), checkName(change, ruleBook)]);
       }
       return [
         {
