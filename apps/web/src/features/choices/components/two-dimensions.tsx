@@ -1,5 +1,5 @@
 import { dimensionOf, type Dimension } from '@settlewright/geometry';
-import { useMemo } from 'react';
+import { useCallback, useMemo } from 'react';
 import { Combobox } from '@/components/combobox.tsx';
 import { LoadingLine } from '@/components/loading.tsx';
 import { Notice } from '@/components/notice.tsx';
@@ -63,19 +63,25 @@ export function TwoDimensions({
     () => ({ across: now, up: (secondId && dimensionOf(document, secondId)?.value) || 0 }),
     [now, document, secondId],
   );
-  const pairs = useMemo(() => {
-    if (!map || !second) return [];
-    const sheetAt = ({ across, up }: BestPair) => {
+  const setAt = useCallback(
+    ({ across, up }: BestPair) => {
       const moved = first.at(across);
-      const set = moved && second.at(up, moved);
+      return moved && second?.at(up, moved);
+    },
+    [first, second],
+  );
+  const pairs = useMemo(() => {
+    if (!map) return [];
+    const sheetAt = (pair: BestPair) => {
+      const set = setAt(pair);
       return set && check(set);
     };
     const best = bestPairs(map, shares, present, PRICED);
     return pricedPairs(best, check(document), sheetAt, ruleBook).slice(0, SHOWN);
-  }, [map, shares, present, first, second, check, document, ruleBook]);
-  const take = ({ across, up }: BestPair) => {
-    const moved = first.at(across);
-    const set = moved && second?.at(up, moved);
+  }, [map, shares, present, setAt, check, document, ruleBook]);
+  const take = (pair: BestPair) => {
+    const { across, up } = pair;
+    const set = setAt(pair);
     if (!set || !second || !replace) return;
     const step = (one: Dimension, from: number, to: number) =>
       `${one.label} ${exactValue(from, one.unit, style)} to ${exactValue(to, one.unit, style)}`;
