@@ -47,6 +47,7 @@ export function StickDesk({ tried, stick, rule, crowd, asked, onCrowd }: StickDe
   const values = useStickValues(tried, stick, rule);
   const { rows, ruleIds, present, trying, shown, offer, suggested, answersAt } = values;
   const rested = useResting(trying);
+  const resting = trying === undefined ? undefined : rested;
   const aboutKeys = useId();
   const counted = useMemo(() => [...ruleIds], [ruleIds]);
   const { curves, fault = asked.fault } = useShareCurves(tried, counted, asked.request);
@@ -77,7 +78,7 @@ export function StickDesk({ tried, stick, rule, crowd, asked, onCrowd }: StickDe
     countsWords(answers.map((answer) => answer?.outcome.verdict)),
     ...(share === undefined ? [] : [aboutInHundred(share)]),
   ].join('; ');
-  const hung = trying === undefined ? present : (rested ?? present);
+  const hung = resting ?? present;
   const paper = useMemo(
     () => stickPaper(dimension, hung, rule, crowd, asked.options, style),
     [dimension, hung, rule, crowd, asked.options, style],
@@ -131,7 +132,7 @@ export function StickDesk({ tried, stick, rule, crowd, asked, onCrowd }: StickDe
         stick={stick}
         ruleIds={ruleIds}
         present={present}
-        trying={trying === undefined ? undefined : rested}
+        trying={resting}
         offer={offer}
         suggested={suggested}
         curves={curves}
