@@ -16,7 +16,7 @@ import { Problem } from '../common/problem';
 import { FitCheckService } from '../fit-checks/fit-check.service';
 import { crowdFrom } from '../populations/crowd-data';
 import { PopulationsService } from '../populations/populations.service';
-import { mixFaults } from '../studies/read-question';
+import { readMix, womenPercentOf } from '../studies/read-mix';
 import { STUDY_WEAR, studyCrowd } from '../studies/study-question';
 
 /** Whom a share is about. */
@@ -47,7 +47,6 @@ export interface CrowdTold {
 const CURVE_PEOPLE = 10_000;
 const MAP_PEOPLE = 4000;
 const SEED = 1;
-const EVENLY = 50;
 const MOST_PLACES = 100;
 
 /** Counts who of a population fits, along one dimension and over two, as the browser does. */
@@ -61,20 +60,14 @@ export class CrowdShares {
   /** The people that are meant, or what is wrong with the request. */
   async crowd(member: MemberInfo, { populationId, womenPercent }: AskedCrowd): Promise<NamedCrowd> {
     const data = await this.populations.crowd(member.workshopId, populationId);
-    const whole = crowdFrom(data);
-    const groups = whole.groups.map(({ group }) => group);
-    const faults = mixFaults(womenPercent, groups);
+    const { mix, faults } = readMix(data, womenPercent);
     if (faults.length > 0) throw Problem.invalid(faults);
-    const percent = groups.length > 1 ? (womenPercent ?? EVENLY) : undefined;
-    const crowd = studyCrowd({
-      crowd: data,
-      ...(percent === undefined ? {} : { womenShare: percent / 100 }),
-    });
+    const percent = womenPercentOf(mix, womenPercent);
     return {
       id: populationId,
-      name: whole.name,
-      crowd,
-      ...(percent === undefined ? {} : { womenPercent: percent }),
+      name: crowdFrom(data).name,
+      crowd: studyCrowd({ crowd: data, ...mix }),
+      ...(percent === null ? {} : { womenPercent: percent }),
     };
   }
 

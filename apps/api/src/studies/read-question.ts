@@ -1,12 +1,11 @@
 import { PERSON_CHECKS, unlikePlaces, type PlaceSituation } from '@settlewright/anthropometry';
 import { measureSet, type SetDocument } from '@settlewright/geometry';
 import { Problem, type ProblemField } from '../common/problem';
-import { crowdFrom, type CrowdData } from '../populations/crowd-data';
+import type { CrowdData } from '../populations/crowd-data';
 import type { StartStudyDto } from './dto/start-study.dto';
+import { readMix } from './read-mix';
 import type { StudyQuestion } from './study-question';
 
-const WHOLE = 100;
-const EVENLY = 50;
 /** Places alike are counted once; of so many unlike ones a block of people still takes seconds. */
 const MOST_UNLIKE_PLACES = 200;
 
@@ -22,11 +21,11 @@ export function readQuestion(
   }: Pick<StudyQuestion, 'blockPeople' | 'ruleVersion' | 'workVersion'>,
 ): StudyQuestion {
   const { places } = measureSet(document);
-  const groups = crowdFrom(crowd).groups.map(({ group }) => group);
+  const { mix, faults: mixFaults } = readMix(crowd, dto.womenPercent);
   const faults = [
     ...placeFaults(dto.placeIds, places),
     ...strangers('ruleIds', dto.ruleIds, [...RULES], 'no rule asked of one sitter has the id'),
-    ...mixFaults(dto.womenPercent ?? undefined, groups),
+    ...mixFaults,
   ];
   if (faults.length > 0) throw Problem.invalid(faults);
   const { people, ruleIds, placeIds } = dto;
@@ -35,7 +34,7 @@ export function readQuestion(
     workVersion,
     ruleVersion,
     crowd,
-    ...(groups.length > 1 ? { womenShare: (dto.womenPercent ?? EVENLY) / WHOLE } : {}),
+    ...mix,
     people,
     seed: dto.seed ?? 1,
     blockPeople,
@@ -84,14 +83,4 @@ export function strangers(
           },
         ],
   );
-}
-
-/** A population of one sex is not mixed. */
-export function mixFaults(womenPercent: number | undefined, groups: readonly string[]): ProblemField[] {
-  const [only, other] = groups;
-  if (womenPercent === undefined || other !== undefined) return [];
-  const accepted = only === 'women' ? WHOLE : 0;
-  if (womenPercent === accepted) return [];
-  const message = `read ${womenPercent}; the population holds ${only} only; accepted: ${accepted}, or leave it out`;
-  return [{ path: 'womenPercent', code: 'one-sex', message }];
 }

@@ -16,6 +16,7 @@ import { askedDocument } from './asked-document';
 import { resultOf } from './count-block';
 import type { StartStudyDto } from './dto/start-study.dto';
 import { Study } from './entities/study.entity';
+import { womenPercentOf } from './read-mix';
 import { readQuestion } from './read-question';
 import { locked, StudyBlocks } from './study-blocks.service';
 import { StudyCounter } from './study-counter';
@@ -105,13 +106,13 @@ export class StudiesService {
   }
 
   private begun(member: MemberInfo, setId: string, dto: StartStudyDto, question: StudyQuestion): Study {
-    const { womenShare, people, seed, ruleVersion } = question;
+    const { people, seed, ruleVersion } = question;
     return this.studies.create({
       setId,
       draftNumber: dto.draftNumber ?? null,
       revisionLetter: dto.revisionLetter?.toUpperCase() ?? null,
       population: toldPopulation(question.crowd),
-      womenPercent: womenShare === undefined ? null : (dto.womenPercent ?? womenShare * 100),
+      womenPercent: womenPercentOf(question, dto.womenPercent),
       people,
       seed,
       ruleIds: dto.ruleIds ?? null,

@@ -1,14 +1,13 @@
 import type { Sitter } from '@settlewright/anthropometry';
 import { measureSet, type SetDocument } from '@settlewright/geometry';
 import { Problem, type ProblemField } from '../common/problem';
-import { crowdFrom, type CrowdData } from '../populations/crowd-data';
-import { mixFaults, seatFaults, strangers } from '../studies/read-question';
+import type { CrowdData } from '../populations/crowd-data';
+import { readMix } from '../studies/read-mix';
+import { seatFaults, strangers } from '../studies/read-question';
 import type { StartSuggestionDto } from './dto/start-suggestion.dto';
 import { readFree } from './read-free';
 import type { SearchQuestion, ToldDimension } from './search-question';
 
-const EVENLY = 50;
-const WHOLE = 100;
 const MOST_SITTERS = 100;
 
 /** What a search is made of besides the request. */
@@ -31,7 +30,7 @@ export function readSearch(
   const { free, told, faults } = readFree(dto.free, document, lengthStepMm);
   const wanted = dto.sitterIds ?? undefined;
   const served = wanted ? sitters.filter(({ id }) => wanted.includes(id)) : sitters;
-  const groups = crowd ? crowdFrom(crowd).groups.map(({ group }) => group) : [];
+  const { mix, faults: mixFaults } = crowd ? readMix(crowd, dto.womenPercent) : mixOfNobody(dto);
   const all = [
     ...faults,
     ...seatFaults('free', measureSet(document).places),
@@ -42,17 +41,16 @@ export function readSearch(
       'nobody who sits here has the id',
     ),
     ...sitterFaults(served, crowd),
-    ...(crowd ? mixFaults(dto.womenPercent ?? undefined, groups) : mixOfNobody(dto)),
+    ...mixFaults,
   ];
   if (all.length > 0) throw Problem.invalid(all);
-  const womenShare = groups.length > 1 ? (dto.womenPercent ?? EVENLY) / WHOLE : undefined;
   const question: SearchQuestion = {
     workVersion,
     document,
     free,
     sitters: served,
     ...(confidence === null ? {} : { confidence }),
-    ...(crowd ? { crowd: { crowd, ...(womenShare === undefined ? {} : { womenShare }) } } : {}),
+    ...(crowd ? { crowd: { crowd, ...mix } } : {}),
   };
   return { question, told };
 }
@@ -67,8 +65,8 @@ function sitterFaults(served: readonly Sitter[], crowd: CrowdData | undefined): 
   return [{ path: 'sitterIds', code: 'nobody-to-serve', message }];
 }
 
-function mixOfNobody({ womenPercent }: StartSuggestionDto): ProblemField[] {
-  if (womenPercent === undefined || womenPercent === null) return [];
+function mixOfNobody({ womenPercent }: StartSuggestionDto): ReturnType<typeof readMix> {
+  if (womenPercent === undefined || womenPercent === null) return { mix: {}, faults: [] };
   const message = `read ${womenPercent} without a population; accepted: both, or neither`;
-  return [{ path: 'womenPercent', code: 'no-population', message }];
+  return { mix: {}, faults: [{ path: 'womenPercent', code: 'no-population', message }] };
 }

@@ -2,6 +2,7 @@ import type { EntityManager } from 'typeorm';
 import type { MemberInfo } from '../common/access.decorator';
 import { Problem } from '../common/problem';
 import { countUnfinished, LISTED } from '../jobs/document-jobs';
+import { womenPercentOf } from '../studies/read-mix';
 import { toldPopulation } from '../studies/told-population';
 import type { StartSuggestionDto } from './dto/start-suggestion.dto';
 import { DimensionSearch } from './entities/dimension-search.entity';
@@ -9,7 +10,6 @@ import type { SearchQuestion, ToldDimension, ToldSitter } from './search-questio
 
 /** So that one workshop does not keep the others waiting. */
 const MOST_UNFINISHED = 5;
-const WHOLE = 100;
 
 /** A row for a search that waits for a worker. */
 export function begunSearch(
@@ -32,7 +32,7 @@ export function begunSearch(
     free: told,
     served: [...sitters.values()],
     population: crowd ? toldPopulation(crowd.crowd) : null,
-    womenPercent: crowd?.womenShare === undefined ? null : (womenPercent ?? crowd.womenShare * WHOLE),
+    womenPercent: womenPercentOf(crowd ?? {}, womenPercent),
     state: 'queued',
     done: 0,
     most: 0,
