@@ -1,4 +1,5 @@
 import type { PieceKind, SetDocument } from '@settlewright/geometry';
+import { capital } from '@/lib/capital.ts';
 import { numberWord } from '@/lib/number-word.ts';
 
 const KINDS: readonly { kind: PieceKind; one: string; many: string }[] = [
@@ -8,8 +9,6 @@ const KINDS: readonly { kind: PieceKind; one: string; many: string }[] = [
   { kind: 'sill', one: 'sill', many: 'sills' },
   { kind: 'overhead', one: 'beam', many: 'beams' },
 ];
-
-const capital = (text: string) => text.charAt(0).toUpperCase() + text.slice(1);
 
 /** What stands in a set, in one sentence: "Four benches, two tables, a sill; six people, 45 checks". */
 export function describeSet(document: SetDocument, seated: number, checks: number): string {

@@ -1,5 +1,6 @@
 import type { FitSheet, RuleBook } from '@settlewright/anthropometry';
 import type { Blame, Dimension, LengthStyle, Suggestion } from '@settlewright/geometry';
+import { capital } from '@/lib/capital.ts';
 import { aboutInHundred, dimensionValue, exactValue, joinWords, markWords } from '@/lib/dimension-words.ts';
 import { footRails } from '@/lib/foot-rails.ts';
 import { countedWords, EVERY_PLACE } from '@/lib/crowd/counted-words.ts';
@@ -13,8 +14,6 @@ function subject({ label, marks, tableMarks }: Dimension): string {
   const tables = tableMarks.length > 0 ? ` with ${markWords(tableMarks)}` : '';
   return `${name} of ${markWords(marks)}${tables}`;
 }
-
-const capital = (text: string): string => text.charAt(0).toUpperCase() + text.slice(1);
 
 /** The parts of an answer's sentence: words and numbers, so that numbers can be set as such. */
 export interface MoveWords {

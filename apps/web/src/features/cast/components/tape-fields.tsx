@@ -6,6 +6,7 @@ import { LengthField } from '@/components/length-field.tsx';
 import { RuleHeading } from '@/components/rule-heading.tsx';
 import { TextField } from '@/components/text-field.tsx';
 import { TAPE_MM } from '@/lib/body-limits.ts';
+import { capital } from '@/lib/capital.ts';
 import type { CastMember } from '@/lib/contract.ts';
 import { dayWords } from '@/lib/dates.ts';
 import type { PersonForm } from '../person-form.ts';
@@ -27,8 +28,6 @@ function aboutMeasure(key: TapeMeasureKey, person: CastMember | null): string {
     .join(' ');
   return by === '' ? howToTake : `Taken ${by}. ${howToTake}`;
 }
-
-const sentenceCase = (words: string) => words.charAt(0).toUpperCase() + words.slice(1);
 
 /** What was taken with a tape, with who took it and when. */
 export function TapeFields({ form, person, open, onPrint }: TapeFieldsProps) {
@@ -70,7 +69,7 @@ export function TapeFields({ form, person, open, onPrint }: TapeFieldsProps) {
               name={`measured.${key}`}
               render={({ field, fieldState }) => (
                 <LengthField
-                  label={sentenceCase(MEASURE_INFO[key].plain)}
+                  label={capital(MEASURE_INFO[key].plain)}
                   description={aboutMeasure(key, person)}
                   minMm={TAPE_MM[key].min}
                   maxMm={TAPE_MM[key].max}

@@ -1,11 +1,10 @@
 import { MEASURE_INFO } from '@settlewright/anthropometry';
 import { Disclosure } from '@/components/disclosure.tsx';
 import { Notice } from '@/components/notice.tsx';
+import { capital } from '@/lib/capital.ts';
 import type { SurveyPreview } from '@/lib/contract.ts';
 import { joinWords, sentence } from '@/lib/dimension-words.ts';
 import { RowFaults } from './row-faults.tsx';
-
-const capital = (text: string): string => text.replace(/^./, (letter) => letter.toUpperCase());
 
 /** Who can be read of the table, who is left out and why, and what will be estimated. */
 export function ReadPeople({ read, isReading }: { read: SurveyPreview; isReading: boolean }) {

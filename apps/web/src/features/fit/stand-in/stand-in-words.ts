@@ -5,6 +5,7 @@ import {
   type StandInCheck,
 } from '@settlewright/anthropometry';
 import { formatMass, type LengthStyle } from '@settlewright/geometry';
+import { capital } from '@/lib/capital.ts';
 import { amountText } from '../amounts.ts';
 import { shortName } from '@/lib/short-name.ts';
 
@@ -13,8 +14,6 @@ export interface Pair {
   castMember: string;
   standIn?: string | undefined;
 }
-
-const capital = (words: string): string => words.charAt(0).toUpperCase() + words.slice(1);
 
 /** Units of the rule and the reader, and from which difference a sit says little. */
 export interface Said {
