@@ -4,14 +4,9 @@ import { LengthField } from '@/components/length-field.tsx';
 import { MassField } from '@/components/mass-field.tsx';
 import { Select } from '@/components/select.tsx';
 import { TextField } from '@/components/text-field.tsx';
+import { BODY_DATA_CHOICES } from '@/lib/body-data-choices.ts';
 import { SHOE_MM, STATURE_MM, WEIGHT_KG } from '@/lib/body-limits.ts';
 import type { PersonForm } from '../person-form.ts';
-
-const BODY_DATA = [
-  { value: 'mixed', words: 'Not said', detail: 'both surveys' },
-  { value: 'women', words: 'Women' },
-  { value: 'men', words: 'Men' },
-] as const;
 
 const CLOTHING = [
   { value: 'light', words: 'Light', detail: 'shirt, summer dress' },
@@ -101,7 +96,7 @@ export function KnownFields({ form }: { form: UseFormReturn<PersonForm> }) {
         render={({ field, fieldState }) => (
           <Select
             label="Predict the rest from the survey of"
-            options={BODY_DATA}
+            options={BODY_DATA_CHOICES}
             value={field.value}
             onChange={field.onChange}
             error={fieldState.error?.message}

@@ -3,6 +3,7 @@ import { LengthField } from '@/components/length-field.tsx';
 import { MassField } from '@/components/mass-field.tsx';
 import { entryOf, type QuantityEntry } from '@/components/quantity-entry.ts';
 import { Select } from '@/components/select.tsx';
+import { BODY_DATA_CHOICES } from '@/lib/body-data-choices.ts';
 import { STATURE_MM, WEIGHT_KG } from '@/lib/body-limits.ts';
 
 /** Somebody who is typed in for one trial and kept nowhere. */
@@ -13,12 +14,6 @@ export interface Stranger {
 }
 
 export const blankStranger: Stranger = { stature: entryOf(null), weight: entryOf(null), bodyData: 'mixed' };
-
-const SURVEYS = [
-  { value: 'mixed', words: 'Not said', detail: 'both surveys' },
-  { value: 'women', words: 'Women' },
-  { value: 'men', words: 'Men' },
-] as const;
 
 const SHOE_MM = 25;
 
@@ -73,7 +68,7 @@ export function StrangerFields({
       />
       <Select
         label="Predict the rest from the survey of"
-        options={SURVEYS}
+        options={BODY_DATA_CHOICES}
         value={value.bodyData}
         onChange={(bodyData) => onChange({ ...value, bodyData })}
       />
