@@ -7,6 +7,7 @@ import { TextField } from '@/components/text-field.tsx';
 import { BODY_DATA_CHOICES } from '@/lib/body-data-choices.ts';
 import { SHOE_MM, STATURE_MM, WEIGHT_KG } from '@/lib/body-limits.ts';
 import type { PersonForm } from '../person-form.ts';
+import { quantityAt } from '../quantity-at.ts';
 
 const CLOTHING = [
   { value: 'light', words: 'Light', detail: 'shirt, summer dress' },
@@ -35,7 +36,7 @@ export function KnownFields({ form }: { form: UseFormReturn<PersonForm> }) {
       <Controller
         control={control}
         name="stature"
-        render={({ field, fieldState }) => (
+        render={(at) => (
           <LengthField
             label="Height"
             optional
@@ -43,11 +44,7 @@ export function KnownFields({ form }: { form: UseFormReturn<PersonForm> }) {
             description="Without shoes, for example 5′ 6 1/2″ or 169 cm."
             minMm={STATURE_MM.min}
             maxMm={STATURE_MM.max}
-            entry={field.value}
-            onChange={field.onChange}
-            onBlur={field.onBlur}
-            ref={field.ref}
-            error={field.value.problem ?? fieldState.error?.message}
+            {...quantityAt(at)}
           />
         )}
       />
@@ -67,18 +64,14 @@ export function KnownFields({ form }: { form: UseFormReturn<PersonForm> }) {
       <Controller
         control={control}
         name="weight"
-        render={({ field, fieldState }) => (
+        render={(at) => (
           <MassField
             label="Weight"
             optional
             description="Says how far the cushion sinks; for example 150 lb, 11 st 4 lb or 72 kg."
             minKg={WEIGHT_KG.min}
             maxKg={WEIGHT_KG.max}
-            entry={field.value}
-            onChange={field.onChange}
-            onBlur={field.onBlur}
-            ref={field.ref}
-            error={field.value.problem ?? fieldState.error?.message}
+            {...quantityAt(at)}
           />
         )}
       />
@@ -106,16 +99,12 @@ export function KnownFields({ form }: { form: UseFormReturn<PersonForm> }) {
       <Controller
         control={control}
         name="shoe"
-        render={({ field, fieldState }) => (
+        render={(at) => (
           <LengthField
             label="Shoe, under the heel"
             minMm={SHOE_MM.min}
             maxMm={SHOE_MM.max}
-            entry={field.value}
-            onChange={field.onChange}
-            onBlur={field.onBlur}
-            ref={field.ref}
-            error={field.value.problem ?? fieldState.error?.message}
+            {...quantityAt(at)}
           />
         )}
       />

@@ -10,6 +10,7 @@ import { capital } from '@/lib/capital.ts';
 import type { CastMember } from '@/lib/contract.ts';
 import { dayWords } from '@/lib/dates.ts';
 import type { PersonForm } from '../person-form.ts';
+import { quantityAt } from '../quantity-at.ts';
 
 interface TapeFieldsProps {
   form: UseFormReturn<PersonForm>;
@@ -67,17 +68,13 @@ export function TapeFields({ form, person, open, onPrint }: TapeFieldsProps) {
               key={key}
               control={control}
               name={`measured.${key}`}
-              render={({ field, fieldState }) => (
+              render={(at) => (
                 <LengthField
                   label={capital(MEASURE_INFO[key].plain)}
                   description={aboutMeasure(key, person)}
                   minMm={TAPE_MM[key].min}
                   maxMm={TAPE_MM[key].max}
-                  entry={field.value}
-                  onChange={field.onChange}
-                  onBlur={field.onBlur}
-                  ref={field.ref}
-                  error={field.value.problem ?? fieldState.error?.message}
+                  {...quantityAt(at)}
                 />
               )}
             />
