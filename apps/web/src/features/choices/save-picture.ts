@@ -3,6 +3,7 @@ import font400 from '@fontsource/work-sans/files/work-sans-latin-400-normal.woff
 import font500 from '@fontsource/work-sans/files/work-sans-latin-500-normal.woff2?url';
 import font600 from '@fontsource/work-sans/files/work-sans-latin-600-normal.woff2?url';
 import { keepFile } from '@/lib/download.ts';
+import { fontDataUrl } from '@/lib/font-data.ts';
 
 /** What stands around a drawing that leaves the page. */
 export interface PictureWords {
@@ -73,19 +74,9 @@ function folded(text: string, letters: number): string[] {
 /** A picture loads nothing from outside itself. */
 async function fontRules(): Promise<string> {
   const rules = Object.entries(FONTS).map(async ([weight, address]) => {
-    const file = await (await fetch(address)).blob();
-    return `@font-face{font-family:'Work Sans';font-weight:${weight};src:url(${await asDataUrl(file)}) format('woff2')}`;
+    return `@font-face{font-family:'Work Sans';font-weight:${weight};src:url(${await fontDataUrl(address)}) format('woff2')}`;
   });
   return (await Promise.all(rules)).join('');
-}
-
-function asDataUrl(file: Blob): Promise<string> {
-  return new Promise((resolve, reject) => {
-    const reader = new FileReader();
-    reader.onload = () => resolve(reader.result as string);
-    reader.onerror = () => reject(new Error('A font could not be read.'));
-    reader.readAsDataURL(file);
-  });
 }
 
 /** The colours of the light sheet, whatever the page wears now: a sheet that is sent is always light. */
