@@ -1,20 +1,9 @@
-const NUMBERS = [
-  'no',
-  'one',
-  'two',
-  'three',
-  'four',
-  'five',
-  'six',
-  'seven',
-  'eight',
-  'nine',
-  'ten',
-  'eleven',
-  'twelve',
-];
+import { numberWords } from '@settlewright/geometry';
 
-/** "four", or "13" from there on. */
+const LAST_IN_WORDS = 12;
+
+/** "no", "four", or "13" from there on. */
 export function numberWord(count: number): string {
-  return NUMBERS[count] ?? String(count);
+  if (count === 0) return 'no';
+  return count <= LAST_IN_WORDS ? numberWords(count) : String(count);
 }

@@ -89,7 +89,13 @@ function spokenInches(parts: number, per: number): string {
   return whole === 0 ? `${fraction} of an inch` : `${numberWords(whole)} and ${fraction} inches`;
 }
 
-function numberWords(n: number): string {
+/**
+ * Says a whole number in words: "zero", "seventeen", "forty-two".
+ *
+ * @param n - whole, >= 0
+ * @returns words below a hundred, digits from there on
+ */
+export function numberWords(n: number): string {
   if (n < 20) return UNITS[n] ?? String(n);
   if (n >= 100) return String(n);
   const rest = n % 10;
