@@ -5,11 +5,11 @@ import fc from 'fast-check';
 import { describe, expect, it } from 'vitest';
 import { anyPiece } from '../../test/arbitrary-pieces.ts';
 import { overlapDepth } from '../../test/convex-overlap.ts';
+import { piece } from '../../test/measured.ts';
 import { derivePieceParts } from '../pieces/kinds.ts';
 import { parametersOf, setParameter } from '../pieces/parameters.ts';
 import { ARRANGEMENTS } from '../room/arrangements.ts';
-import type { Piece, PieceKind, PieceOf, SetDocument } from '../room/document.ts';
-import { newPiece } from '../room/edit-pieces.ts';
+import type { Piece, SetDocument } from '../room/document.ts';
 import { emptySetDocument, readSetDocument } from '../room/read-document.ts';
 import { roomFor } from './room-for.ts';
 
@@ -29,14 +29,6 @@ const SETS: [string, SetDocument][] = [
 ];
 
 const setOf = (...pieces: Piece[]): SetDocument => ({ ...emptySetDocument(), pieces });
-function piece<K extends PieceKind>(
-  kind: K,
-  mark: string,
-  [xMm, zMm, turnDeg]: [number, number, number],
-  sizes: Partial<PieceOf<K>> = {},
-): PieceOf<K> {
-  return { ...newPiece(kind, mark.toLowerCase(), mark, { xMm, zMm, turnDeg }), ...sizes };
-}
 
 /** How deep two pieces of a set reach into each other, by the tests' own measure. */
 function depthBetween(document: SetDocument, one: string, other: string): number {
