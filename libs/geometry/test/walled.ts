@@ -1,5 +1,6 @@
 import type { PieceOf } from '../src/room/document.ts';
 import type { PlanPoint } from '../src/situation/plan.ts';
+import { degrees } from '../src/units/angle.ts';
 import { piece } from './measured.ts';
 
 /**
@@ -10,15 +11,10 @@ export function wallsAlong(corners: readonly PlanPoint[], mark = 'W'): PieceOf<'
   return corners.slice(1).map(([x, z], i) => {
     const [fx, fz] = corners[i] ?? [x, z];
     const [dx, dz] = [x - fx, z - fz];
-    return piece(
-      'bulkhead',
-      `${mark}${i + 1}`,
-      [(fx + x) / 2, (fz + z) / 2, (Math.atan2(-dz, dx) * 180) / Math.PI],
-      {
-        lengthMm: Math.hypot(dx, dz),
-        heightMm: 2400,
-        thicknessMm: 50,
-      },
-    );
+    return piece('bulkhead', `${mark}${i + 1}`, [(fx + x) / 2, (fz + z) / 2, degrees(Math.atan2(-dz, dx))], {
+      lengthMm: Math.hypot(dx, dz),
+      heightMm: 2400,
+      thicknessMm: 50,
+    });
   });
 }

@@ -1,5 +1,5 @@
 import type { Vec3 } from '../parts/part.ts';
-import { cross, dot, length, scale, sub, unit } from '../mannequin/vector.ts';
+import { add, along, cross, dot, length, scale, sub, unit } from '../mannequin/vector.ts';
 import type { Shape } from './shape.ts';
 
 /** How far two shapes reach into each other. */
@@ -32,11 +32,7 @@ const scratch = new Float64Array(3);
 /** Point of a whole shape, its margin with it, furthest along a unit vector. */
 function reach(shape: Shape, d: Vec3): Vec3 {
   shape.support(d[0], d[1], d[2], scratch);
-  return [
-    scratch[0]! + shape.marginMm * d[0],
-    scratch[1]! + shape.marginMm * d[1],
-    scratch[2]! + shape.marginMm * d[2],
-  ];
+  return along([scratch[0]!, scratch[1]!, scratch[2]!], d, shape.marginMm);
 }
 
 /**
@@ -89,7 +85,7 @@ function firstFaces(corners: Corner[], towards: (d: Vec3) => Corner): Face[] {
   const square = unit(cross(line, sub(third.w, first.w)), cross(line, aside));
   corners.push(first, second, third, further(square, first.w));
   const inside = scale(
-    corners.reduce<Vec3>((sum, { w }) => [sum[0] + w[0], sum[1] + w[1], sum[2] + w[2]], [0, 0, 0]),
+    corners.reduce<Vec3>((sum, { w }) => add(sum, w), [0, 0, 0]),
     0.25,
   );
   return (

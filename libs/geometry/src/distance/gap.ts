@@ -1,3 +1,4 @@
+import { along } from '../mannequin/vector.ts';
 import type { Vec3 } from '../parts/part.ts';
 import { coreDistance } from './core-distance.ts';
 import { depthOf } from './depth.ts';
@@ -42,15 +43,10 @@ export function gapBetween(one: Shape, other: Shape, atMostMm = Infinity): Gap |
     (to[1] - from[1]) / distanceMm,
     (to[2] - from[2]) / distanceMm,
   ];
-  const on = (p: Vec3, radius: number): Vec3 => [
-    p[0] + radius * direction[0],
-    p[1] + radius * direction[1],
-    p[2] + radius * direction[2],
-  ];
   return {
     distanceMm: distanceMm - margins,
-    fromMm: on(from, one.marginMm),
-    toMm: on(to, -other.marginMm),
+    fromMm: along(from, direction, one.marginMm),
+    toMm: along(to, direction, -other.marginMm),
     direction,
   };
 }

@@ -1,6 +1,7 @@
+import { add } from '../mannequin/vector.ts';
 import type { Vec3 } from '../parts/part.ts';
 import type { PagePoint } from './drawing.ts';
-import { plus, type ViewSolid } from './view-solid.ts';
+import type { ViewSolid } from './view-solid.ts';
 
 /** A corner of the outline, and how far along the axis (0 to 1) the plane meets the line that starts there. */
 type Met = readonly [corner: Vec3, along: number];
@@ -36,7 +37,7 @@ function alongAxis({ base, axis }: ViewSolid, depth: number): PagePoint[][] {
   const faces: PagePoint[][] = [];
   for (let i = 0; i + 1 < met.length; i += 2) {
     const [p, q] = [met[i]!, met[i + 1]!];
-    const [r, s] = [plus(q, axis), plus(p, axis)];
+    const [r, s] = [add(q, axis), add(p, axis)];
     faces.push([p, q, r, s].map(([x, y]): PagePoint => [x, y]));
   }
   return faces;

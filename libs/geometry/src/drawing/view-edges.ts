@@ -1,5 +1,6 @@
+import { add } from '../mannequin/vector.ts';
 import type { Vec3 } from '../parts/part.ts';
-import { plus, type ViewSolid } from './view-solid.ts';
+import type { ViewSolid } from './view-solid.ts';
 
 /** A straight edge in the frame of a view. */
 export type ViewEdge = readonly [Vec3, Vec3];
@@ -23,8 +24,8 @@ export function viewEdges({ base, axis, smooth, circles }: ViewSolid): ViewEdge[
   const edges: ViewEdge[] = [];
   for (let i = 0; i < n; i += 1) {
     const [a, b] = [base[i]!, base[(i + 1) % n]!];
-    edges.push([a, b], [plus(a, axis), plus(b, axis)]);
-    if (!smooth[i] || shows[i] !== shows[(i + n - 1) % n]) edges.push([a, plus(a, axis)]);
+    edges.push([a, b], [add(a, axis), add(b, axis)]);
+    if (!smooth[i] || shows[i] !== shows[(i + n - 1) % n]) edges.push([a, add(a, axis)]);
   }
   return edges.filter(([a, b]) => Math.hypot(b[0] - a[0], b[1] - a[1]) > END_ON_MM);
 }

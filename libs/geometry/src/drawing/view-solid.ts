@@ -1,3 +1,4 @@
+import { add, cross, dot, length, sub } from '../mannequin/vector.ts';
 import type { Part, Vec3 } from '../parts/part.ts';
 import { convexPieces } from './convex-pieces.ts';
 import { onPage, type PageFrame } from './set-view.ts';
@@ -40,15 +41,6 @@ export interface ViewSolid {
 const CORNER_RAD = 0.35;
 const ROUND_SIDES = 64;
 
-const minus = (a: Vec3, b: Vec3): Vec3 => [a[0] - b[0], a[1] - b[1], a[2] - b[2]];
-export const plus = (a: Vec3, b: Vec3): Vec3 => [a[0] + b[0], a[1] + b[1], a[2] + b[2]];
-const dot = (a: Vec3, b: Vec3): number => a[0] * b[0] + a[1] * b[1] + a[2] * b[2];
-const cross = (a: Vec3, b: Vec3): Vec3 => [
-  a[1] * b[2] - a[2] * b[1],
-  a[2] * b[0] - a[0] * b[2],
-  a[0] * b[1] - a[1] * b[0],
-];
-
 /** Middles of the sides of a 64-sided figure lie as far inside its circle as its corners lie outside: 0.06 % each. */
 const ROUND_FACTOR = 2 / (1 + Math.cos(Math.PI / ROUND_SIDES));
 
@@ -65,29 +57,29 @@ function ringOf(part: Part): { base: Vec3[]; axis: Vec3 } {
   }
   const { corners } = partEdges(part);
   const half = corners.length / 2;
-  return { base: corners.slice(0, half), axis: minus(corners[half]!, corners[0]!) };
+  return { base: corners.slice(0, half), axis: sub(corners[half]!, corners[0]!) };
 }
 
 function sideOf(a: Vec3, b: Vec3, c: Vec3, inside: Vec3): HalfSpace | undefined {
-  const raw = cross(minus(b, a), minus(c, a));
-  const length = Math.hypot(...raw);
-  if (length < 1e-9) return undefined;
-  const sign = dot(raw, minus(inside, a)) > 0 ? -1 : 1;
-  const normal: Vec3 = [(sign * raw[0]) / length, (sign * raw[1]) / length, (sign * raw[2]) / length];
+  const raw = cross(sub(b, a), sub(c, a));
+  const size = length(raw);
+  if (size < 1e-9) return undefined;
+  const sign = dot(raw, sub(inside, a)) > 0 ? -1 : 1;
+  const normal: Vec3 = [(sign * raw[0]) / size, (sign * raw[1]) / size, (sign * raw[2]) / size];
   return { normal, limit: dot(normal, a) };
 }
 
 function convexSolid(ring: readonly Vec3[], axis: Vec3): ConvexSolid {
-  const all = [...ring, ...ring.map((corner) => plus(corner, axis))];
+  const all = [...ring, ...ring.map((corner) => add(corner, axis))];
   const inside = all.reduce<Vec3>(
-    (sum, p) => plus(sum, [p[0] / all.length, p[1] / all.length, p[2] / all.length]),
+    (sum, p) => add(sum, [p[0] / all.length, p[1] / all.length, p[2] / all.length]),
     [0, 0, 0],
   );
   const [p, q, r] = ring as [Vec3, Vec3, Vec3];
   const found = [
     sideOf(p, q, r, inside),
-    sideOf(plus(p, axis), plus(q, axis), plus(r, axis), inside),
-    ...ring.map((corner, i) => sideOf(corner, ring[(i + 1) % ring.length]!, plus(corner, axis), inside)),
+    sideOf(add(p, axis), add(q, axis), add(r, axis), inside),
+    ...ring.map((corner, i) => sideOf(corner, ring[(i + 1) % ring.length]!, add(corner, axis), inside)),
   ];
   const along = (n: 0 | 1 | 2) => all.map((corner) => corner[n]);
   return {
@@ -98,8 +90,8 @@ function convexSolid(ring: readonly Vec3[], axis: Vec3): ConvexSolid {
 }
 
 function angleAt(before: Vec3, at: Vec3, after: Vec3): number {
-  const [a, b] = [minus(at, before), minus(after, at)];
-  return Math.atan2(Math.hypot(...cross(a, b)), dot(a, b));
+  const [a, b] = [sub(at, before), sub(after, at)];
+  return Math.atan2(length(cross(a, b)), dot(a, b));
 }
 
 /**

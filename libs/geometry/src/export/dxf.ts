@@ -10,6 +10,7 @@ import {
 import type { Layer } from '../drawing/drawn.ts';
 import type { PagePoint } from '../drawing/drawing.ts';
 import type { SetDrawing } from '../drawing/set-drawing.ts';
+import { degrees } from '../units/angle.ts';
 import { MM_PER_INCH } from '../units/length-style.ts';
 import { isCircle } from './arc-outline.ts';
 import { LAYERS } from './layers.ts';
@@ -61,9 +62,7 @@ export function dxfOf(drawing: SetDrawing, units: 'millimetres' | 'inches'): str
     if (isCircle(arc)) dxf.addCircle(centre, size(arc.radiusMm), on(arc.layer));
     else {
       // The page turns the other way round: y runs down on it.
-      const [from, to] = [arc.toRad, arc.fromRad].map(
-        (angle) => ((((-angle * 180) / Math.PI) % 360) + 360) % 360,
-      );
+      const [from, to] = [arc.toRad, arc.fromRad].map((angle) => ((degrees(-angle) % 360) + 360) % 360);
       dxf.addArc(centre, size(arc.radiusMm), from!, to!, on(arc.layer));
     }
   }

@@ -1,3 +1,4 @@
+import { degrees } from '../units/angle.ts';
 import type { JointLimit, JointRanges } from './joint-ranges.ts';
 import type { MannequinPose } from './pose.ts';
 import { chestRad, direction, type ArmStance, type Stance } from './stance.ts';
@@ -16,8 +17,6 @@ export interface JointWarning extends JointAngle {
   limitDeg: number;
   source: JointLimit['source'];
 }
-
-const degrees = (rad: number): number => (rad * 180) / Math.PI;
 
 function armAngles(arm: ArmStance, stance: Stance): Omit<JointAngle, 'side'>[] {
   const upper = direction(arm.shoulder, arm.elbow);
