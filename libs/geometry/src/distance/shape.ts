@@ -1,3 +1,4 @@
+import { add, sub } from '../mannequin/vector.ts';
 import type { Vec3 } from '../parts/part.ts';
 
 /** Upright box around a shape, room frame, millimetres. */
@@ -17,14 +18,13 @@ export interface Shape extends Bounds {
   support: (x: number, y: number, z: number, out: Float64Array) => void;
 }
 
-function boundsOf(points: readonly Vec3[], radius: number): Bounds {
-  return grown(boundsAround(points.map((at) => ({ minMm: at, maxMm: at }))), radius);
-}
-
-const grown = ({ minMm, maxMm }: Bounds, by: number): Bounds => ({
-  minMm: [minMm[0] - by, minMm[1] - by, minMm[2] - by],
-  maxMm: [maxMm[0] + by, maxMm[1] + by, maxMm[2] + by],
+/** The box that reaches so far to both sides of a point along each axis. */
+const boxAbout = (centre: Vec3, reach: Vec3): Bounds => ({
+  minMm: sub(centre, reach),
+  maxMm: add(centre, reach),
 });
+
+const ballBounds = (centre: Vec3, radius: number): Bounds => boxAbout(centre, [radius, radius, radius]);
 
 /**
  * A ball that runs along a line while its radius changes evenly; a capsule with equal radii, a ball with equal ends.
@@ -40,10 +40,7 @@ export function roundedCone(from: Vec3, fromRadiusMm: number, to: Vec3, toRadius
   const [x0, y0, z0] = from;
   const [x1, y1, z1] = to;
   return {
-    ...boundsAround([
-      grown({ minMm: from, maxMm: from }, fromRadiusMm),
-      grown({ minMm: to, maxMm: to }, toRadiusMm),
-    ]),
+    ...boundsAround([ballBounds(from, fromRadiusMm), ballBounds(to, toRadiusMm)]),
     marginMm,
     support: (x, y, z, out) => {
       const length = Math.sqrt(x * x + y * y + z * z);
@@ -65,10 +62,8 @@ export function roundedCone(from: Vec3, fromRadiusMm: number, to: Vec3, toRadius
 export function ellipsoid(centre: Vec3, axes: readonly [Vec3, Vec3, Vec3]): Shape {
   const [a, b, c] = axes;
   const reach = (axis: 0 | 1 | 2): number => Math.hypot(a[axis], b[axis], c[axis]);
-  const [rx, ry, rz] = [reach(0), reach(1), reach(2)];
   return {
-    minMm: [centre[0] - rx, centre[1] - ry, centre[2] - rz],
-    maxMm: [centre[0] + rx, centre[1] + ry, centre[2] + rz],
+    ...boxAbout(centre, [reach(0), reach(1), reach(2)]),
     marginMm: 0,
     support: (x, y, z, out) => {
       const u = a[0] * x + a[1] * y + a[2] * z;
@@ -88,7 +83,7 @@ export function ellipsoid(centre: Vec3, axes: readonly [Vec3, Vec3, Vec3]): Shap
 export function hull(corners: readonly Vec3[]): Shape {
   const p = Float64Array.from(corners.flat());
   return {
-    ...boundsOf(corners, 0),
+    ...boundsAround(corners.map((at) => ({ minMm: at, maxMm: at }))),
     marginMm: 0,
     support: (x, y, z, out) => {
       let [best, at] = [-Infinity, 0];
@@ -111,7 +106,7 @@ export function hull(corners: readonly Vec3[]): Shape {
  */
 export const hullOfBalls = (centres: readonly Vec3[], radiusMm: number): Shape => ({
   ...hull(centres),
-  ...boundsOf(centres, radiusMm),
+  ...boundsAround(centres.map((centre) => ballBounds(centre, radiusMm))),
   marginMm: radiusMm,
 });
 
@@ -127,10 +122,8 @@ export function cylinder(centre: Vec3, half: Vec3, radiusMm: number): Shape {
   const [ux, uy, uz] = [half[0] / length, half[1] / length, half[2] / length];
   const reach = (axis: 0 | 1 | 2): number =>
     Math.abs(half[axis]) + radiusMm * Math.sqrt(Math.max(0, 1 - (half[axis] / length) ** 2));
-  const [rx, ry, rz] = [reach(0), reach(1), reach(2)];
   return {
-    minMm: [centre[0] - rx, centre[1] - ry, centre[2] - rz],
-    maxMm: [centre[0] + rx, centre[1] + ry, centre[2] + rz],
+    ...boxAbout(centre, [reach(0), reach(1), reach(2)]),
     marginMm: 0,
     support: (x, y, z, out) => {
       const along = ux * x + uy * y + uz * z;
