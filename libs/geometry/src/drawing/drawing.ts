@@ -1,4 +1,5 @@
 import type { MaterialKey } from '../parts/part.ts';
+import { boxAround, type Box } from './page-box.ts';
 import type { SitterColour } from './sitter-colours.ts';
 
 /** A point on the page in millimetres of the real thing: x to the right, y **down**. */
@@ -52,7 +53,7 @@ export interface DimensionShape extends Owned {
 
 /** A drawing as plain data; its shapes are painted in order. */
 export interface Drawing {
-  boundsMm: { x: number; y: number; width: number; height: number };
+  boundsMm: Box;
   shapes: DrawShape[];
 }
 
@@ -92,23 +93,13 @@ function pointsOf(shape: DrawShape): readonly PagePoint[] {
  * @returns the drawing; one without shapes has bounds of the margin alone
  */
 export function drawingOf(shapes: DrawShape[], marginMm = 0): Drawing {
-  const points = shapes.flatMap((shape) => [...pointsOf(shape)]);
-  if (points.length === 0) {
-    return { boundsMm: { x: -marginMm, y: -marginMm, width: 2 * marginMm, height: 2 * marginMm }, shapes };
-  }
-  let [x0, y0, x1, y1] = [Infinity, Infinity, -Infinity, -Infinity];
-  for (const [x, y] of points) {
-    x0 = Math.min(x0, x);
-    y0 = Math.min(y0, y);
-    x1 = Math.max(x1, x);
-    y1 = Math.max(y1, y);
-  }
+  const { x, y, width, height } = boxAround(shapes.flatMap((shape) => [...pointsOf(shape)]));
   return {
     boundsMm: {
-      x: x0 - marginMm,
-      y: y0 - marginMm,
-      width: x1 - x0 + 2 * marginMm,
-      height: y1 - y0 + 2 * marginMm,
+      x: x - marginMm,
+      y: y - marginMm,
+      width: width + 2 * marginMm,
+      height: height + 2 * marginMm,
     },
     shapes,
   };

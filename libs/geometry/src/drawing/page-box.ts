@@ -1,5 +1,3 @@
-import type { PagePoint } from './drawing.ts';
-
 /** A box of the page. */
 export interface Box {
   x: number;
@@ -8,8 +6,8 @@ export interface Box {
   height: number;
 }
 
-/** Smallest box around points. */
-export function boxAround(points: readonly PagePoint[]): Box {
+/** Smallest box around points; empty and at the origin without any. */
+export function boxAround(points: readonly (readonly [number, number])[]): Box {
   let [x0, y0, x1, y1] = [Infinity, Infinity, -Infinity, -Infinity];
   for (const [x, y] of points) {
     [x0, y0, x1, y1] = [Math.min(x0, x), Math.min(y0, y), Math.max(x1, x), Math.max(y1, y)];
