@@ -1,8 +1,7 @@
 import type { Part, Vec3 } from '../parts/part.ts';
-import { onPage, type PageFrame } from './set-view.ts';
+import { pagePoint, type PageFrame } from './set-view.ts';
 import { boxAround, type Box } from './page-box.ts';
 import { partEdges } from './solid-outline.ts';
-import type { PagePoint } from './drawing.ts';
 
 /**
  * The box that parts fill on a page.
@@ -12,14 +11,7 @@ import type { PagePoint } from './drawing.ts';
  * @returns millimetres, right and down
  */
 export function extentOf(parts: readonly Part[], frame: PageFrame): Box {
-  return boxAround(
-    parts.flatMap((part) =>
-      cornersOf(part).map((corner): PagePoint => {
-        const [x, y] = onPage(frame, corner);
-        return [x, y];
-      }),
-    ),
-  );
+  return boxAround(parts.flatMap((part) => cornersOf(part).map((corner) => pagePoint(frame, corner))));
 }
 
 /** Corners of a part; of an upright round one the corners of the box around it, whose extent is the true one. */

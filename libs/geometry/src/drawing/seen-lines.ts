@@ -6,7 +6,7 @@ import { hiddenStretches, SHORTEST_MM } from './hidden-stretches.ts';
 import { hidersOf, type Hiders } from './hiders.ts';
 import { without } from './intervals.ts';
 import { lineTracks, type PageArc, type PageLine } from './line-tracks.ts';
-import { onPage, pageFrame, sectionDepth, type SetView } from './set-view.ts';
+import { pageFrame, pagePoint, sectionDepth, type SetView } from './set-view.ts';
 import { convexOutline, partEdges } from './solid-outline.ts';
 import { behindSection, viewEdges } from './view-edges.ts';
 import { viewSolid, type ConvexSolid, type PageCircle, type ViewSolid } from './view-solid.ts';
@@ -178,12 +178,7 @@ export function seenLines(
       ({ convex, part }) => nearest(convex, 'min') >= depth && isOverhead(part.pieceId),
     );
     for (const { part } of away) {
-      const outline = convexOutline(
-        partEdges(part).corners.map((corner): PagePoint => {
-          const [x, y] = onPage(frame, corner);
-          return [x, y];
-        }),
-      );
+      const outline = convexOutline(partEdges(part).corners.map((corner) => pagePoint(frame, corner)));
       const ink = inkOf('above', part.pieceId);
       outline.forEach((from, i) => tracks.addLine(from, outline[(i + 1) % outline.length]!, ink));
     }

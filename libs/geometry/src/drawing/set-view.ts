@@ -1,4 +1,5 @@
 import type { Vec3 } from '../parts/part.ts';
+import type { PagePoint } from './drawing.ts';
 
 /** From where a set is drawn: from above, or square from one side of the room. */
 export const VIEW_DIRECTIONS = ['above', 'front', 'rear', 'left', 'right'] as const;
@@ -58,6 +59,18 @@ export function onPage({ right, down, toward }: PageFrame, [x, y, z]: Vec3): Vec
     down[0] * x + down[1] * y + down[2] * z,
     toward[0] * x + toward[1] * y + toward[2] * z,
   ];
+}
+
+/**
+ * A point of the room on the page.
+ *
+ * @param frame - of the page
+ * @param point - in the room, millimetres
+ * @returns right and down
+ */
+export function pagePoint(frame: PageFrame, point: Vec3): PagePoint {
+  const [x, y] = onPage(frame, point);
+  return [x, y];
 }
 
 /**
