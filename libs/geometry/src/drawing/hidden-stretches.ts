@@ -57,18 +57,8 @@ export function hiddenStretches(from: Vec3, to: Vec3, solids: readonly ConvexSol
   const length = Math.hypot(...way);
   if (length < SHORTEST_MM) return [];
   const direction: Vec3 = [way[0] / length, way[1] / length, way[2] / length];
-  const [low, high] = ([0, 1] as const).reduce<[number[], number[]]>(
-    ([lows, highs], n) => [
-      [...lows, Math.min(from[n], to[n])],
-      [...highs, Math.max(from[n], to[n])],
-    ],
-    [[], []],
-  );
-  const deepest = Math.min(from[2], to[2]);
   const found: Interval[] = [];
   for (const solid of solids) {
-    if (solid.max[2] < deepest || solid.min[0] > high[0]! || solid.max[0] < low[0]!) continue;
-    if (solid.min[1] > high[1]! || solid.max[1] < low[1]!) continue;
     const hidden = hiddenBy(solid, from, direction, length);
     if (!hidden) continue;
     // Nothing is left to hide: what one solid covers whole needs no other.

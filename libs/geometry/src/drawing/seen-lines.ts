@@ -63,10 +63,6 @@ function bordersOf(
 
 /** The stretches of a circle that are hidden, found on a figure of 64 sides. */
 function hiddenArc({ centre, radiusMm }: PageCircle, hiders: Hiders) {
-  const solids = hiders(
-    [centre[0] - radiusMm, centre[1] - radiusMm, centre[2]],
-    [centre[0] + radiusMm, centre[1] + radiusMm, centre[2]],
-  );
   const at = (n: number): Vec3 => {
     const angle = (2 * Math.PI * n) / ARC_STEPS;
     return [centre[0] + radiusMm * Math.cos(angle), centre[1] + radiusMm * Math.sin(angle), centre[2]];
@@ -75,7 +71,7 @@ function hiddenArc({ centre, radiusMm }: PageCircle, hiders: Hiders) {
   return Array.from({ length: ARC_STEPS }, (_, n) => {
     const [from, to] = [at(n), at(n + 1)];
     const chord = Math.hypot(to[0] - from[0], to[1] - from[1]);
-    return hiddenStretches(from, to, solids).map(([a, b]): [number, number] => [
+    return hiddenStretches(from, to, hiders(from, to)).map(([a, b]): [number, number] => [
       step * (n + a / chord),
       step * (n + b / chord),
     ]);
