@@ -1,8 +1,8 @@
-import { outOfFrame, type PlanOutline, type PlanPoint } from '../situation/plan.ts';
+import type { PlanOutline, PlanPoint } from '../situation/plan.ts';
 import type { SurveyedPlace } from '../situation/survey.ts';
 import { convexOf } from './convex.ts';
 import type { Obstacle } from './obstacles.ts';
-import { coreAt, type Pose } from './room-around.ts';
+import { coreAt, poseAhead, type Pose } from './room-around.ts';
 import { seated, standing, type Band, type BodyHeights, type Walker } from './walker.ts';
 
 const SIDES = 24;
@@ -42,11 +42,6 @@ const asObstacles = (place: SurveyedPlace, bands: readonly Band[], pose: Pose): 
     };
   });
 
-const poseAt = ({ plan }: SurveyedPlace, aheadMm: number): Pose => {
-  const [[xMm, zMm] = [0, 0]] = outOfFrame([[0, aheadMm]], plan);
-  return { xMm, zMm, headingRad: plan.facingRad };
-};
-
 /**
  * Somebody who sits at a place, as an obstacle to others.
  *
@@ -59,7 +54,7 @@ export const seatedAt = (place: SurveyedPlace, walker: Walker, [steppedOverMm]: 
   asObstacles(
     place,
     seated(walker, place.frame.frontMm[1], steppedOverMm),
-    poseAt(place, -place.effectiveDepthMm),
+    poseAhead(place.plan, -place.effectiveDepthMm),
   );
 
 /**
@@ -75,6 +70,6 @@ export function stoodUpAt(place: SurveyedPlace, walker: Walker, heights: BodyHei
   const legsMm = bands[0]?.radiusMm ?? 0;
   return bands.flatMap((band) => {
     const leanMm = band.name === 'trunk' ? band.radiusMm : 0;
-    return asObstacles(place, [band], poseAt(place, legsMm - leanMm));
+    return asObstacles(place, [band], poseAhead(place.plan, legsMm - leanMm));
   });
 }

@@ -1,5 +1,5 @@
 import { nearestBetween } from '../situation/plan-distance.ts';
-import type { PlanOutline, PlanPoint } from '../situation/plan.ts';
+import { outOfFrame, type PlanFrame, type PlanOutline, type PlanPoint } from '../situation/plan.ts';
 import { lineDistance } from './convex.ts';
 import type { Obstacle } from './obstacles.ts';
 import type { Band, BandName } from './walker.ts';
@@ -53,12 +53,20 @@ export function among(bands: readonly Band[], obstacles: readonly Obstacle[]): B
  * @returns both ends, x and z
  */
 export function coreAt(core: Band['core'], { xMm, zMm, headingRad }: Pose): [PlanPoint, PlanPoint] {
-  const [c, s] = [Math.cos(headingRad), Math.sin(headingRad)];
-  const put = ([left, ahead]: PlanPoint): PlanPoint => [
-    xMm + left * c + ahead * s,
-    zMm - left * s + ahead * c,
-  ];
-  return [put(core[0]), put(core[1])];
+  const [a, b] = outOfFrame(core, { xMm, zMm, facingRad: headingRad });
+  return [a ?? core[0], b ?? core[1]];
+}
+
+/**
+ * A body that looks along a frame.
+ *
+ * @param plan - the frame
+ * @param aheadMm - how far ahead of its origin the body's middle is
+ * @returns where it is
+ */
+export function poseAhead(plan: PlanFrame, aheadMm: number): Pose {
+  const [[xMm, zMm] = [0, 0]] = outOfFrame([[0, aheadMm]], plan);
+  return { xMm, zMm, headingRad: plan.facingRad };
 }
 
 /**

@@ -1,7 +1,15 @@
-import { extent, inFrame, outOfFrame } from '../situation/plan.ts';
+import { extent, inFrame } from '../situation/plan.ts';
 import type { SurveyedPlace } from '../situation/survey.ts';
 import type { Obstacle } from './obstacles.ts';
-import { among, clearanceAt, OPEN_MM, squeezeAt, type BodyAmong, type Pose } from './room-around.ts';
+import {
+  among,
+  clearanceAt,
+  OPEN_MM,
+  poseAhead,
+  squeezeAt,
+  type BodyAmong,
+  type Pose,
+} from './room-around.ts';
 import type { Station } from './seat-line.ts';
 import { sliding, type Walker } from './walker.ts';
 
@@ -49,14 +57,10 @@ export function slider(
     return made;
   };
   return ({ plan, on }) => {
-    const at = (aheadMm: number): Pose => {
-      const [[xMm, zMm] = [0, 0]] = outOfFrame([[0, aheadMm]], plan);
-      return { xMm, zMm, headingRad: plan.facingRad };
-    };
     const [above, below] = bodiesOn(on.piece.id);
     return [
-      mostRoom(above, (mm) => at(trunk.radiusMm - on.effectiveDepthMm + mm)),
-      mostRoom(below, (mm) => at(shins.radiusMm + mm)),
+      mostRoom(above, (mm) => poseAhead(plan, trunk.radiusMm - on.effectiveDepthMm + mm)),
+      mostRoom(below, (mm) => poseAhead(plan, shins.radiusMm + mm)),
     ];
   };
 }

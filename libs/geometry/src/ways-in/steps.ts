@@ -1,6 +1,5 @@
-import { outOfFrame } from '../situation/plan.ts';
 import type { SurveyedPlace } from '../situation/survey.ts';
-import type { Pose } from './room-around.ts';
+import { poseAhead, type Pose } from './room-around.ts';
 import type { Move, WayStep } from './way-in.ts';
 
 /** From this much of it to the side a step is sideways, as a sine. */
@@ -28,8 +27,7 @@ export function stepsOf(walked: readonly Pose[], slid: readonly Pose[], place: S
     steps.push({ move: 'sit', poses: [...stood, ...slid.slice(0, 1)] }, { move: 'slide', poses: [...slid] });
     return steps;
   }
-  const [[xMm, zMm] = [0, 0]] = outOfFrame([[0, -place.hipBehindFrontMm]], place.plan);
-  steps.push({ move: 'sit', poses: [...stood, { xMm, zMm, headingRad: place.plan.facingRad }] });
+  steps.push({ move: 'sit', poses: [...stood, poseAhead(place.plan, -place.hipBehindFrontMm)] });
   return steps;
 }
 
