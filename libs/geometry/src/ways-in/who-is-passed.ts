@@ -1,7 +1,7 @@
 import type { PlanOutline } from '../situation/plan.ts';
 import type { SurveyedPlace } from '../situation/survey.ts';
 import { seatedAt, stoodUpAt } from './bodies.ts';
-import { convexOf, type Convex } from './convex.ts';
+import type { Convex } from './convex.ts';
 import type { Obstacle } from './obstacles.ts';
 import type { WalkedIn } from './walk-in.ts';
 import type { BodyHeights, Walker } from './walker.ts';
@@ -55,16 +55,13 @@ function canStandUp({ place, comer }: Other, obstacles: readonly Obstacle[], hei
   return stoodUpAt(place, comer, heights)
     .filter(({ group }) => group === 'thighs')
     .every((legs) =>
-      before.every(
-        ({ bottomMm, topMm, outline }) =>
-          bottomMm >= legs.topMm || topMm <= legs.bottomMm || areApart(legs.outline, outline),
-      ),
+      before.every((one) => one.bottomMm >= legs.topMm || one.topMm <= legs.bottomMm || areApart(legs, one)),
     );
 }
 
 /** Whether some side of one of two convex outlines has all of the other beyond it. */
-const areApart = (one: PlanOutline, other: PlanOutline): boolean =>
-  isBeyond(convexOf(one), other) || isBeyond(convexOf(other), one);
+const areApart = (one: Obstacle, other: Obstacle): boolean =>
+  isBeyond(one.shape, other.outline) || isBeyond(other.shape, one.outline);
 
 const isBeyond = ({ xs, zs, nx, nz }: Convex, points: PlanOutline): boolean =>
   xs.some((sx, i) => {
