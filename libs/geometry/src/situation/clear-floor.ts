@@ -37,8 +37,13 @@ export function clearCircle(found: Survey, spot: Spot, limits: Limits): number {
   return 2 * Math.min(FAR_MM, ...distances);
 }
 
-/** From the origin of a frame to a convex outline; 0 inside it. */
-function distanceToOrigin(outline: PlanOutline): number {
+/**
+ * From the origin of a frame to a convex outline.
+ *
+ * @param outline - in the frame
+ * @returns millimetres; 0 inside it
+ */
+export function distanceToOrigin(outline: PlanOutline): number {
   let nearest = Infinity;
   let [left, right] = [false, false];
   outline.forEach(([x, z], i) => {

@@ -112,6 +112,30 @@ export function outOfFrame(outline: PlanOutline, frame: PlanFrame): PlanOutline 
   return outline.map(([left, ahead]) => [frame.xMm + left * c + ahead * s, frame.zMm - left * s + ahead * c]);
 }
 
+/**
+ * A rectangle along the axes of a frame.
+ *
+ * @param frame - origin and facing
+ * @param left - limits along the first axis
+ * @param ahead - limits along the second axis
+ * @returns the rectangle in the room's x and z
+ */
+export function rectangleIn(
+  frame: PlanFrame,
+  left: readonly [number, number],
+  ahead: readonly [number, number],
+): PlanOutline {
+  return outOfFrame(
+    [
+      [left[0], ahead[0]],
+      [left[1], ahead[0]],
+      [left[1], ahead[1]],
+      [left[0], ahead[1]],
+    ],
+    frame,
+  );
+}
+
 /** A window in a frame; an open side is infinite. */
 export interface PlanWindow {
   left?: readonly [number, number];

@@ -2,7 +2,7 @@ import { benchLayout } from '../pieces/bench-layout.ts';
 import { derivePieceParts } from '../pieces/kinds.ts';
 import { placeFrames, type PlaceFrame } from '../pieces/place-frames.ts';
 import type { Piece, PieceOf, SetDocument } from '../room/document.ts';
-import { inFrame, planSolid, type PlanFrame, type PlanOutline, type PlanSolid } from './plan.ts';
+import { inFrame, planSolid, rectangleIn, type PlanFrame, type PlanOutline, type PlanSolid } from './plan.ts';
 
 /** A piece with its parts as clearances see them. */
 interface SurveyedPiece {
@@ -117,14 +117,7 @@ export function rectangleOf(
   xs: readonly [number, number],
   zs: readonly [number, number],
 ): PlanOutline {
-  const { xMm, zMm, facingRad } = planOfPiece(piece);
-  const [c, s] = [Math.cos(facingRad), Math.sin(facingRad)];
-  return [
-    [xs[0], zs[0]],
-    [xs[1], zs[0]],
-    [xs[1], zs[1]],
-    [xs[0], zs[1]],
-  ].map(([x = 0, z = 0]) => [xMm + x * c + z * s, zMm - x * s + z * c] as const);
+  return rectangleIn(planOfPiece(piece), xs, zs);
 }
 
 function surveyedPlace(frame: PlaceFrame, piece: SurveyedPlace['piece']): SurveyedPlace {

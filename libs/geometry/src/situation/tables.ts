@@ -103,14 +103,25 @@ function betweenFacing(table: Table, isTaken: (name: EdgeName) => boolean): { be
   return widths.length > 0 ? { betweenFacingMm: Math.min(...widths) } : {};
 }
 
-function edgeOf(table: Table, { name, turnRad }: typeof FRONT): Edge {
+const edgeOf = (table: Table, { name, turnRad }: typeof FRONT): Edge => ({
+  name,
+  ...edgeAt(table, turnRad),
+});
+
+/**
+ * An edge of a table.
+ *
+ * @param table - the table
+ * @param turnRad - which way it lies from the middle: 0 for the front, quarter turns for the others
+ * @returns its length, and the level frame at its middle that looks in under the top
+ */
+export function edgeAt(table: Table, turnRad: number): { lengthMm: number; plan: PlanFrame } {
   const { xMm, zMm, facingRad } = planOfPiece(table);
   const outward = facingRad + turnRad;
-  const across = name === 'front' || name === 'back';
-  const toEdge = (across ? table.widthMm : table.lengthMm) / 2;
+  const isLong = Math.abs(Math.cos(turnRad)) > Math.SQRT1_2;
+  const toEdge = (isLong ? table.widthMm : table.lengthMm) / 2;
   return {
-    name,
-    lengthMm: across ? table.lengthMm : table.widthMm,
+    lengthMm: isLong ? table.lengthMm : table.widthMm,
     plan: {
       xMm: xMm + Math.sin(outward) * toEdge,
       zMm: zMm + Math.cos(outward) * toEdge,

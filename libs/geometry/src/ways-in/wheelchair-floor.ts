@@ -1,9 +1,10 @@
 import { kneeDepthNeededMm, ruleNumber, type RuleBook } from '@settlewright/anthropometry';
 import { benchLayout } from '../pieces/bench-layout.ts';
 import type { PieceOf, SetDocument } from '../room/document.ts';
-import { clipped, outOfFrame, type PlanFrame, type PlanOutline } from '../situation/plan.ts';
+import { distanceToOrigin } from '../situation/clear-floor.ts';
+import { clipped, rectangleIn, type PlanFrame, type PlanOutline } from '../situation/plan.ts';
 import { planOfPiece, solidsNear, survey, type Survey } from '../situation/survey.ts';
-import { convexOf, lineDistance } from './convex.ts';
+import { edgeAt } from '../situation/tables.ts';
 
 /** What a wheelchair user needs of a floor. */
 export type FloorKind = 'floor' | 'approach' | 'knee-space' | 'toe-space' | 'turning-circle' | 'turning-tee';
@@ -26,7 +27,7 @@ export interface FloorShape {
 }
 
 const CIRCLE_SIDES = 48;
-const QUARTER_RAD = Math.PI / 2;
+const QUARTERS_RAD = [0, 1, 2, 3].map((n) => (n * Math.PI) / 2);
 
 type Window = { left: readonly [number, number]; ahead: readonly [number, number] };
 
@@ -45,7 +46,7 @@ export function wheelchairFloor(document: SetDocument, ruleBook: Pick<RuleBook, 
   const pieces = document.pieces.flatMap((piece) => {
     if (!piece.accessible) return [];
     if (piece.kind === 'table')
-      return leastBlocked(edgesOf(piece).map((edge) => atTable(maker, piece, edge)));
+      return leastBlocked(QUARTERS_RAD.map((turn) => atTable(maker, piece, edgeAt(piece, turn).plan)));
     return piece.kind === 'bench' ? leastBlocked([1, -1].map((side) => [atBench(maker, piece, side)])) : [];
   });
   return [...pieces, ...turning(maker, found)];
@@ -88,15 +89,7 @@ function shapeMaker(found: Survey, ruleBook: Pick<RuleBook, 'rule'>) {
       );
       return {
         kind,
-        outline: outOfFrame(
-          [
-            [left[0], ahead[0]],
-            [left[1], ahead[0]],
-            [left[1], ahead[1]],
-            [left[0], ahead[1]],
-          ],
-          plan,
-        ),
+        outline: rectangleIn(plan, left, ahead),
         widthMm: left[1] - left[0],
         lengthMm: ahead[1] - ahead[0],
         heightsMm,
@@ -113,16 +106,6 @@ const blocked = (shapes: readonly FloorShape[]): number =>
 
 const leastBlocked = (choices: readonly FloorShape[][]): FloorShape[] =>
   choices.reduce((best, one) => (blocked(one) < blocked(best) ? one : best), choices[0] ?? []);
-
-/** Edges of a table: origin at the middle of each, looking in under the top. */
-function edgesOf(table: PieceOf<'table'>): PlanFrame[] {
-  const { xMm, zMm, facingRad } = planOfPiece(table);
-  return [0, 1, 2, 3].map((n) => {
-    const out = facingRad + n * QUARTER_RAD;
-    const toEdge = (n % 2 === 0 ? table.widthMm : table.lengthMm) / 2;
-    return { xMm: xMm + Math.sin(out) * toEdge, zMm: zMm + Math.cos(out) * toEdge, facingRad: out + Math.PI };
-  });
-}
 
 function atTable(
   { number, rectangle, kneesUnder }: Maker,
@@ -171,12 +154,13 @@ function turning({ number, rectangle, clauseOf, named, overHeadsMm }: Maker, fou
   if (turningAt === undefined) return [];
   const { xMm, zMm } = turningAt;
   const widthMm = number('ACC-08', 'circle');
-  const inside = found.pieces.flatMap(({ solids }) =>
-    solids.filter(
-      ({ bottomMm, outline }) =>
-        bottomMm < overHeadsMm && lineDistance(convexOf(outline), xMm, zMm, xMm, zMm, Infinity) < widthMm / 2,
-    ),
-  );
+  const inside = solidsNear(
+    found,
+    { ...turningAt, facingRad: 0 },
+    widthMm / 2,
+    () => true,
+    ({ bottomMm }) => bottomMm < overHeadsMm,
+  ).filter(({ outline }) => distanceToOrigin(outline) < widthMm / 2);
   const circle: FloorShape = {
     kind: 'turning-circle',
     outline: Array.from({ length: CIRCLE_SIDES }, (_, n) => {
@@ -191,8 +175,8 @@ function turning({ number, rectangle, clauseOf, named, overHeadsMm }: Maker, fou
     blockedBy: named(inside.map(({ pieceId }) => pieceId)),
   };
   const [arm, square] = [number('ACC-08', 'arm'), number('ACC-08', 'square')];
-  const tees = [0, 1, 2, 3].map((n) => {
-    const plan = { xMm, zMm, facingRad: n * QUARTER_RAD };
+  const tees = QUARTERS_RAD.map((facingRad) => {
+    const plan = { ...turningAt, facingRad };
     const half = square / 2;
     return [
       rectangle('turning-tee', 'ACC-08', plan, { left: [-half, half], ahead: [-half, arm - half] }),
