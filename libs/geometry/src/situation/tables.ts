@@ -1,4 +1,5 @@
 import type { PlaceSituation, TableSituation } from '@settlewright/anthropometry';
+import { union, without, type Interval } from '../drawing/intervals.ts';
 import type { PieceOf } from '../room/document.ts';
 import type { Limits } from './limits.ts';
 import { clipped, extent, inFrame, type PlanFrame, type PlanSolid } from './plan.ts';
@@ -153,16 +154,8 @@ function clearBetweenLegs(found: Survey, table: Table, edge: Edge, { legs }: Lim
 }
 
 /** What intervals leave free between two ends. */
-function freeStretches(from: number, to: number, blocked: (readonly [number, number])[]): [number, number][] {
-  const free: [number, number][] = [];
-  let low = from;
-  for (const [b0, b1] of [...blocked].sort((a, b) => a[0] - b[0])) {
-    if (b0 > low) free.push([low, b0]);
-    low = Math.max(low, b1);
-  }
-  if (to > low) free.push([low, to]);
-  return free;
-}
+const freeStretches = (from: number, to: number, blocked: readonly Interval[]): Interval[] =>
+  without([[from, to]], union(blocked, 0), 0);
 
 /** Knee and toe space below one edge, in the widest free stretch of it. */
 function kneeSpace(
