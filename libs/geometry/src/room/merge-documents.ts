@@ -5,7 +5,7 @@ import { freeId, nextMark } from './edit-pieces.ts';
 import { withPath } from './leaves.ts';
 import { readSetDocument, type DocumentFieldError } from './read-document.ts';
 import type { PostureChoice } from './posture-choice.ts';
-import { withoutLostSeats } from './seating.ts';
+import { choosePosture, withoutLostSeats } from './seating.ts';
 
 /** Somebody who has no place in a merged set. */
 export interface Unseated {
@@ -85,7 +85,7 @@ function withMine(merged: SetDocument, difference: DocumentDifference): SetDocum
     case 'seating': {
       const place = Number(difference.id.slice(difference.id.lastIndexOf(':') + 1));
       return key === 'posture'
-        ? withMyPosture(merged, pieceId, place, mine as PostureChoice | undefined)
+        ? choosePosture(merged, pieceId, place, (mine as PostureChoice | undefined) ?? null)
         : withMySitter(merged, pieceId, place, mine as SitterRef | undefined);
     }
     case 'asked':
@@ -109,20 +109,6 @@ function withMySitter(
   const others = merged.seating.filter((seat) => !isThere(seat));
   const seat = { ...merged.seating.find(isThere), pieceId, place };
   return { ...merged, seating: sitter === undefined ? others : [...others, { ...seat, sitter }] };
-}
-
-function withMyPosture(
-  merged: SetDocument,
-  pieceId: string,
-  place: number,
-  posture: PostureChoice | undefined,
-): SetDocument {
-  const seating = merged.seating.map((seat) => {
-    if (seat.pieceId !== pieceId || seat.place !== place) return seat;
-    const { pieceId: piece, place: at, sitter } = seat;
-    return { pieceId: piece, place: at, sitter, ...(posture && { posture }) };
-  });
-  return { ...merged, seating };
 }
 
 function withMyPiece(merged: SetDocument, pieceId: string, difference: DocumentDifference): SetDocument {
