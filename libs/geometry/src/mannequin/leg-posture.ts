@@ -64,7 +64,6 @@ export function legsFor(f: Figure, placement: BodyPlacement, shoeMm: number): Le
 /**
  * Feet on a rail: thighs along the seat, shins forwards or backwards so that the soles lie on it.
  *
- * @param hipMm - the hip point of the place, forwards of the body frame's origin
  * @returns the legs, or `undefined` when the soles do not come to lie on it
  */
 export function legsOnRail(
@@ -72,7 +71,6 @@ export function legsOnRail(
   placement: BodyPlacement,
   shoeMm: number,
   rail: FootRail,
-  hipMm: number,
 ): Legs | undefined {
   const upright = placement.tiltRad;
   const knee = restKnee(f);
@@ -81,7 +79,7 @@ export function legsOnRail(
   const cosine = (kneeAt[1] - f.MH - shoeMm - rail.topMm) / shinOf(f);
   if (cosine > 1 || cosine < Math.cos(SHIN_FURTHEST_RAD)) return undefined;
   const swing = Math.acos(cosine);
-  const aheadOfOrigin = rail.aheadOfHipMm + hipMm;
+  const aheadOfOrigin = rail.aheadOfHipMm + HIP_FORWARD_MM;
   for (const shin of [-swing, swing]) {
     const ankle = kneeAt[2] - Math.sin(shin) * shinOf(f);
     const under = aheadOfOrigin - ankle;

@@ -106,13 +106,10 @@ export function poseMannequin(input: {
   const wantsRail = choice.feet === 'rail' || (choice.feet === undefined && standing.heelGapMm > 0.5);
   const railed =
     wantsRail && footRail
-      ? legsOnRail(
-          f,
-          placement,
-          shoeMm,
-          { ...footRail, aheadOfHipMm: footRail.aheadOfHipMm - aheadMm - forward },
-          HIP_FORWARD_MM,
-        )
+      ? legsOnRail(f, placement, shoeMm, {
+          ...footRail,
+          aheadOfHipMm: footRail.aheadOfHipMm - aheadMm - forward,
+        })
       : undefined;
   const legs = railed ?? standing;
   if (railed) notes.push({ kind: 'feet-on-rail' });
