@@ -82,6 +82,12 @@ export function armOnLap(f: Figure, bend: TrunkBend): ArmStance {
   return armAt(f, bend, reach, [-inwards, Math.max(tip - 8, 2 * middle - 8), f.Ha], [0.12, 1, 0.1]);
 }
 
+/** Wishes that an arm can reach, stretched all but straight. */
+function withinReach(f: Figure, shoulder: Vec3, wishes: Wish[]): Wish[] {
+  const { upperMm, forearmMm } = armLinks(f);
+  return wishes.filter(({ wrist }) => length(sub(wrist, shoulder)) < 0.985 * (upperMm + forearmMm));
+}
+
 /**
  * Forearms on a table.
  *
@@ -90,17 +96,16 @@ export function armOnLap(f: Figure, bend: TrunkBend): ArmStance {
 export function armOnTable(f: Figure, bend: TrunkBend, rest: Rest, up: Vec3): ArmStance | undefined {
   const shoulder = bendPoint(f, bend, restShoulder(f));
   if (rest.topMm > shoulder[1] - 120 || rest.topMm < 0.5 * f.TC) return undefined;
-  const { upperMm, forearmMm } = armLinks(f);
-  const withinReach = [0.34, 0.44, 0.54].flatMap((out, i) =>
-    steps(Math.max(rest.edgeMm + 25, 0.7 * f.AD), rest.edgeMm + 0.8 * forearmMm, 12)
-      .map((z): Wish => ({
-        wrist: [out * f.BA, rest.topMm + 0.86 * f.radius.wrist + 2, z],
-        dislike: 0.12 * i,
-      }))
-      .filter(({ wrist }) => length(sub(wrist, shoulder)) < 0.985 * (upperMm + forearmMm)),
+  const { forearmMm } = armLinks(f);
+  const wishes = [0.34, 0.44, 0.54].flatMap((out, i) =>
+    steps(Math.max(rest.edgeMm + 25, 0.7 * f.AD), rest.edgeMm + 0.8 * forearmMm, 12).map((z): Wish => ({
+      wrist: [out * f.BA, rest.topMm + 0.86 * f.radius.wrist + 2, z],
+      dislike: 0.12 * i,
+    })),
   );
-  if (withinReach.length === 0) return undefined;
-  const reach = bestReach(f, bend, withinReach, rest);
+  const within = withinReach(f, shoulder, wishes);
+  if (within.length === 0) return undefined;
+  const reach = bestReach(f, bend, within, rest);
   return armAt(f, bend, reach, along(along([0, 0, 1], [1, 0, 0], -0.4), up, -0.06), up);
 }
 
@@ -136,10 +141,10 @@ export function armOnSill(f: Figure, bend: TrunkBend, sill: SideRest, up: Vec3):
         wrist: [sill.nearMm + out, sill.topMm + 0.86 * f.radius.wrist + 2, shoulder[2] + ahead],
         dislike: 0.1 * i,
       })),
-    )
-    .filter(({ wrist }) => length(sub(wrist, shoulder)) < 0.985 * (upperMm + forearmMm));
-  if (wishes.length === 0) return undefined;
-  const reach = bestReach(f, bend, wishes, side);
+    );
+  const within = withinReach(f, shoulder, wishes);
+  if (within.length === 0) return undefined;
+  const reach = bestReach(f, bend, within, side);
   // A forearm that hangs over the edge by its wrist alone does not lie on it.
   if (reach.middle[1] < sill.topMm - 0.5 * upperMm) return undefined;
   return armAt(f, bend, reach, along(sub(reach.end, reach.middle), up, -0.1 * forearmMm), up);
@@ -157,14 +162,12 @@ const CUP_GRIP_MM = 45;
 export function armToCup(f: Figure, bend: TrunkBend, rest: Rest, up: Vec3): ArmStance | undefined {
   const shoulder = bendPoint(f, bend, restShoulder(f));
   if (rest.topMm > shoulder[1] - 60 || rest.topMm < 0.5 * f.TC) return undefined;
-  const { upperMm, forearmMm } = armLinks(f);
-  const wishes = [0, 40, 80, 120]
-    .map((further, i): Wish => ({
-      wrist: [0.4 * f.BA, rest.topMm + CUP_GRIP_MM, rest.edgeMm + CUP_IN_MM - 0.55 * f.Ha + further],
-      dislike: 0.1 * i,
-    }))
-    .filter(({ wrist }) => length(sub(wrist, shoulder)) < 0.985 * (upperMm + forearmMm));
-  if (wishes.length === 0) return undefined;
-  const reach = bestReach(f, bend, wishes, rest);
+  const wishes = [0, 40, 80, 120].map((further, i): Wish => ({
+    wrist: [0.4 * f.BA, rest.topMm + CUP_GRIP_MM, rest.edgeMm + CUP_IN_MM - 0.55 * f.Ha + further],
+    dislike: 0.1 * i,
+  }));
+  const within = withinReach(f, shoulder, wishes);
+  if (within.length === 0) return undefined;
+  const reach = bestReach(f, bend, within, rest);
   return armAt(f, bend, reach, along(along([0, 0, 1], [1, 0, 0], -0.35), up, 0.08), [1, 0.35, 0]);
 }
