@@ -3,7 +3,7 @@ import { readFigure } from '../mannequin/figure.ts';
 import type { JointRanges, JointSweep } from '../mannequin/joint-ranges.ts';
 import { legLine } from '../mannequin/leg-sections.ts';
 import type { MannequinPose } from '../mannequin/pose.ts';
-import { armLinks, bendPoint, chestRad, mirror, restShoulder } from '../mannequin/stance.ts';
+import { armLinks, bendPoint, chestRad, kneeRadius, mirror, restShoulder } from '../mannequin/stance.ts';
 import { add, scale, sub, turnAboutX, turnAboutY } from '../mannequin/vector.ts';
 import type { Part, Vec3 } from '../parts/part.ts';
 import { gapBetween, type Gap } from './gap.ts';
@@ -63,7 +63,7 @@ export function jointEnvelopes(pose: MannequinPose, { sweeps }: JointRanges): Jo
     add(hip, turnAboutY(turnAboutX(sub(knee, hip), ZERO, -lifted), ZERO, outwards));
   return sweeps.flatMap((sweep) =>
     (['left', 'right'] as const).map((side): JointEnvelope => {
-      const radiusMm = sweep.joint === 'elbow' ? f.radius.elbow : 0.42 * (f.KH - f.PH);
+      const radiusMm = sweep.joint === 'elbow' ? f.radius.elbow : kneeRadius(f);
       const centresMm = turnsOf(sweep).map(({ forwards, outwards }) => {
         const at = (sweep.joint === 'elbow' ? elbowAt : kneeAt)(forwards, outwards);
         return toRoom(placement, side === 'left' ? at : mirror(at));

@@ -10,6 +10,7 @@ import {
   direction,
   HIP_FORWARD_MM,
   HIP_HEIGHT_MM,
+  kneeRadius,
   mirror,
   restAnkle,
   restElbow,
@@ -71,7 +72,7 @@ function legStretches(f: Figure, stance: Stance): Stretch[] {
         stance.toesOutRad,
       ),
     );
-  const cap = 0.42 * (f.KH - f.PH);
+  const cap = kneeRadius(f);
   const calf = (f.BKL - f.BPL - 7) / 2;
   const heel = 0.34 * f.FB;
   const toe = 0.22 * f.FB;

@@ -107,12 +107,11 @@ export function bicepsTuck(f: Figure): number {
   return Math.max(0, restOut - (f.BD / 2 + 0.11 * (f.FF - f.BD)));
 }
 
+/** Radius of the knee; its centre lies as high over the seat. */
+export const kneeRadius = (f: Figure): number => 0.42 * (f.KH - f.PH);
+
 /** Centre of the knee with the thigh along the seat. */
-export const restKnee = (f: Figure): Vec3 => [
-  0.235 * f.HB + 6,
-  0.42 * (f.KH - f.PH),
-  (f.BPL + f.BKL) / 2 - 4,
-];
+export const restKnee = (f: Figure): Vec3 => [0.235 * f.HB + 6, kneeRadius(f), (f.BPL + f.BKL) / 2 - 4];
 
 /** Centre of the ankle with the shin upright. */
 export const restAnkle = (f: Figure): Vec3 => [0.235 * f.HB + 6, f.MH - f.PH, (f.BPL + f.BKL) / 2 - 4];
