@@ -1,6 +1,12 @@
 import type { SetDocument } from '../room/document.ts';
 import type { DimensionKind } from './dimension-kinds.ts';
 
+/** Kind of the dimension that moves tables with the seats. */
+export const SEAT_AND_TABLES = 'seat-and-tables';
+
+/** The kind of number that a dimension is. */
+export const kindOf = ({ id }: Pick<Dimension, 'id'>): string => id.split('|')[0] ?? id;
+
 /** One number of a set that can be chosen, with every piece that moves along. */
 export interface Dimension {
   /** Stable within a set: the kind of number, and the piece where it is one piece's alone. */

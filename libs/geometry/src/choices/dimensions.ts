@@ -1,10 +1,8 @@
 import { parametersOf, setParameter } from '../pieces/parameters.ts';
 import type { Piece, SetDocument } from '../room/document.ts';
-import type { Dimension } from './dimension.ts';
+import { SEAT_AND_TABLES, type Dimension } from './dimension.ts';
 import { DIMENSION_KINDS, type DimensionKind } from './dimension-kinds.ts';
 import { tableOverlaps } from './table-overlap.ts';
-
-const WITH_TABLES = 'seat-and-tables';
 
 /**
  * The numbers of a set that can be chosen: for all pieces that have one, and for each piece alone where there are
@@ -55,7 +53,7 @@ export function dimensionIdOf(document: SetDocument, pieceId: string, key: strin
 function withTables(document: SetDocument, kind: DimensionKind, seats: readonly Piece[]): Dimension[] {
   const tables = document.pieces.filter((piece) => piece.kind === 'table');
   if (tables.length === 0) return [];
-  return [{ ...dimension(document, kind, seats, tables), id: WITH_TABLES }];
+  return [{ ...dimension(document, kind, seats, tables), id: SEAT_AND_TABLES }];
 }
 
 interface Mover {

@@ -1,4 +1,4 @@
-import type { Dimension } from './dimension.ts';
+import { kindOf, SEAT_AND_TABLES, type Dimension } from './dimension.ts';
 
 /** Most dimensions that one search moves: with more, too few choices are tried of each. */
 export const MOST_FREE = 6;
@@ -7,11 +7,10 @@ export const SEARCH_PEOPLE = 4000;
 /** The same people each time. */
 export const SEARCH_SEED = 1;
 
-const SEAT_AND_TABLES = 'seat-and-tables';
-
 /** The numbers of pieces that a dimension sets: two dimensions that set the same one cannot both be free. */
-function setsOf({ id, pieceIds, marks }: Dimension): string[] {
-  const [kind = id] = id.split('|');
+function setsOf(dimension: Dimension): string[] {
+  const { pieceIds, marks } = dimension;
+  const kind = kindOf(dimension);
   if (kind !== SEAT_AND_TABLES) return pieceIds.map((pieceId) => `${kind} ${pieceId}`);
   return pieceIds.map((pieceId, n) => `${n < marks.length ? 'seat-height' : 'table-height'} ${pieceId}`);
 }

@@ -1,5 +1,6 @@
 import type { Practice, RuleBook } from '@settlewright/anthropometry';
 import { MM_PER_INCH, type LengthStyle } from '../units/length-style.ts';
+import { kindOf, SEAT_AND_TABLES, type Dimension } from './dimension.ts';
 import { dimensionValue, markWords } from './dimension-words.ts';
 import type { StoryStick } from './story-stick.ts';
 import type { Stretch } from './stretches.ts';
@@ -14,9 +15,9 @@ export interface StickBand {
 }
 
 /** Practices are kept by the kind of number they are about. */
-function practiceOf(ruleBook: RuleBook, dimensionId: string): Practice | undefined {
-  const kind = dimensionId === 'seat-and-tables' ? 'seat-height' : dimensionId.split('|')[0];
-  return ruleBook.practices.find(({ id }) => id === kind);
+function practiceOf(ruleBook: RuleBook, dimension: Pick<Dimension, 'id'>): Practice | undefined {
+  const kind = kindOf(dimension);
+  return ruleBook.practices.find(({ id }) => id === (kind === SEAT_AND_TABLES ? 'seat-height' : kind));
 }
 
 /**
@@ -35,7 +36,7 @@ export function stickBands(
   const [least = 0, most = 0] = [values[0], values.at(-1)];
   const show = (value: number) => dimensionValue(value, dimension.unit, style);
   const bands: StickBand[] = [];
-  const practice = practiceOf(ruleBook, dimension.id);
+  const practice = practiceOf(ruleBook, dimension);
   if (practice) {
     const [from, to] = [practice.lowerIn * MM_PER_INCH, practice.upperIn * MM_PER_INCH];
     bands.push({
