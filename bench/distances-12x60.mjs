@@ -2,6 +2,7 @@ import { createRequire } from 'node:module';
 import { createBodyModel } from '@settlewright/anthropometry';
 import { deriveParts, measureSet, placeFrames, poseMannequin, sitterDistances } from '@settlewright/geometry';
 import { roomOfTwelve } from './lib/room-of-twelve.mjs';
+import { middleTime } from './lib/times.mjs';
 
 const load = createRequire(import.meta.url);
 const PARTS = 60;
@@ -30,12 +31,7 @@ export async function run() {
   const parts = deriveParts(document)
     .sort((a, b) => away(a) - away(b))
     .slice(0, PARTS);
-  const times = [];
-  for (let i = 0; i < WARM_UP + RUNS; i += 1) {
-    const start = performance.now();
-    sitterDistances(bodies, parts);
-    if (i >= WARM_UP) times.push(performance.now() - start);
-  }
-  times.sort((a, b) => a - b);
-  return [{ name: 'distances-12x60', value: times[RUNS / 2], unit: 'ms', aim: 5, reference: null }];
+  const measure = () => sitterDistances(bodies, parts);
+  middleTime(WARM_UP, measure);
+  return [{ name: 'distances-12x60', value: middleTime(RUNS, measure), unit: 'ms', aim: 5, reference: null }];
 }

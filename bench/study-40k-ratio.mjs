@@ -4,15 +4,8 @@ import fs from 'node:fs';
 import os from 'node:os';
 import path from 'node:path';
 import { fileURLToPath } from 'node:url';
-import {
-  drawPeople,
-  lensHeightMm,
-  makePlace,
-  leastTime,
-  ruleBook,
-  studyOnce,
-  wear,
-} from './lib/study-scene.mjs';
+import { drawPeople, lensHeightMm, makePlace, ruleBook, studyOnce, wear } from './lib/study-scene.mjs';
+import { leastTime } from './lib/times.mjs';
 
 const reference = fileURLToPath(new URL('reference/study_40k.py', import.meta.url));
 const WARM_UP = 20;

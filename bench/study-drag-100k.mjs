@@ -1,5 +1,6 @@
 import { createStudy } from '@settlewright/anthropometry';
-import { drawPeople, makePlace, middleTime, setupFor } from './lib/study-scene.mjs';
+import { drawPeople, makePlace, setupFor } from './lib/study-scene.mjs';
+import { middleTime } from './lib/times.mjs';
 
 const PLACES = 12;
 const STEP_MM = 25.4 / 8;

@@ -1,4 +1,5 @@
-import { drawPeople, leastTime, studyOnce } from './lib/study-scene.mjs';
+import { drawPeople, studyOnce } from './lib/study-scene.mjs';
+import { leastTime } from './lib/times.mjs';
 
 const WARM_UP = 20;
 const RUNS = 41;

@@ -2,6 +2,7 @@ import { createRequire } from 'node:module';
 import { createBodyModel } from '@settlewright/anthropometry';
 import { findWaysIn } from '@settlewright/geometry';
 import { roomOfTwelve } from './lib/room-of-twelve.mjs';
+import { middleTime } from './lib/times.mjs';
 
 const load = createRequire(import.meta.url);
 const WARM_UP = 3;
@@ -18,12 +19,7 @@ export async function run() {
     const measures = model.predict(model.mannequin(sitter)).means();
     return { placeId: `${pieceId}:${place}`, measures, shoeMm, clothing };
   });
-  const times = [];
-  for (let n = 0; n < WARM_UP + RUNS; n += 1) {
-    const start = performance.now();
-    findWaysIn(document, comers, HEIGHTS);
-    if (n >= WARM_UP) times.push(performance.now() - start);
-  }
-  times.sort((a, b) => a - b);
-  return [{ name: 'ways-12', value: times[Math.floor(RUNS / 2)], unit: 'ms', aim: 300, reference: null }];
+  const find = () => findWaysIn(document, comers, HEIGHTS);
+  middleTime(WARM_UP, find);
+  return [{ name: 'ways-12', value: middleTime(RUNS, find), unit: 'ms', aim: 300, reference: null }];
 }
