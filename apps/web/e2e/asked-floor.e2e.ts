@@ -2,7 +2,8 @@ import { ARRANGEMENTS } from '@settlewright/geometry';
 import type { Browser, Page } from 'playwright-core';
 import { afterAll, beforeAll, describe, expect, it } from 'vitest';
 import { DEMO, openMember, signIn, unique } from './account.ts';
-import { expectAccessible, openBrowser, openVisitor, PHONE } from './browser.ts';
+import { expectAccessible, openBrowser, openVisitor, PHONE, sidewaysPx } from './browser.ts';
+import { demoProduction } from './productions.ts';
 
 describe('what a set asks of its floor', () => {
   let browser: Browser;
@@ -14,16 +15,12 @@ describe('what a set asks of its floor', () => {
   beforeAll(async () => {
     browser = await openBrowser();
     const designer = await openMember(DEMO.designer.email);
-    const productions = `/workshops/${designer.workshopId}/productions`;
-    const { items } = await designer.get<{ items: { id: string }[] }>(
-      `${productions}?search=Larch%20Junction`,
-    );
-    const productionId = items[0]?.id ?? '';
-    const sets = `${productions}/${productionId}/sets`;
+    const { at, home } = await demoProduction(designer);
+    const sets = `${at}/sets`;
     const document = ARRANGEMENTS.find(({ id }) => id === 'facing-benches')?.build();
     const { id } = await designer.post<{ id: string }>(sets, { name: unique('Floor'), document });
     putAway = () => designer.post(`${sets}/${id}/archive`, {});
-    fitPath = `/w/${designer.workshopId}/p/${productionId}/sets/${id}/fit`;
+    fitPath = `${home}/sets/${id}/fit`;
     ({ page, complaints } = await openVisitor(browser));
     await signIn(page, DEMO.designer.email);
   });
@@ -58,9 +55,8 @@ describe('what a set asks of its floor', () => {
     await corner(3).waitFor({ state: 'detached' });
 
     await page.setViewportSize(PHONE);
-    const wider = () => page.evaluate(() => document.documentElement.scrollWidth - innerWidth);
     // The sheet of the room takes its new width with the next picture.
-    await expect.poll(wider).toBeLessThanOrEqual(0);
+    await expect.poll(() => sidewaysPx(page)).toBeLessThanOrEqual(0);
     await expectAccessible(page);
     expect(complaints).toEqual([]);
   });

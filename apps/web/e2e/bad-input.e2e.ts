@@ -2,6 +2,7 @@ import type { Browser, Page } from 'playwright-core';
 import { afterAll, beforeAll, describe, expect, it } from 'vitest';
 import { DEMO, openMember, signIn, signUp, unique, type Member } from './account.ts';
 import { linkIn, mailTo, openBrowser, openVisitor } from './browser.ts';
+import { startProduction } from './productions.ts';
 import { choose, numberSaid, openRoomOf, sentence, toggleFit, typeNumber } from './room.ts';
 
 const HOSTILE = '<img src=x onerror=document.title="taken">';
@@ -17,15 +18,7 @@ describe('input that should not be taken', () => {
   beforeAll(async () => {
     browser = await openBrowser();
     owner = await openMember(DEMO.owner.email);
-    const list = `/workshops/${owner.workshopId}/productions`;
-    const { id } = await owner.post<{ id: string }>(list, {
-      name: unique('Odd things typed'),
-      summary: '',
-      units: 'feet-inches',
-      roundTo: 8,
-    });
-    production = `${list}/${id}`;
-    home = `/w/${owner.workshopId}/p/${id}`;
+    ({ at: production, home } = await startProduction(owner, 'Odd things typed'));
     ({ page, complaints } = await openVisitor(browser));
     await signIn(page, DEMO.owner.email);
   });

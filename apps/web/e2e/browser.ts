@@ -53,6 +53,10 @@ export async function openVisitor(
   return { context, page, complaints };
 }
 
+/** How many pixels of the page stand beyond the right edge of the window; none is 0 or less. */
+export const sidewaysPx = (page: Page): Promise<number> =>
+  page.evaluate(() => document.documentElement.scrollWidth - innerWidth);
+
 /** No serious or critical finding on the page as it stands. */
 export async function expectAccessible(page: Page): Promise<void> {
   const { violations } = await new AxeBuilder({ page }).analyze();

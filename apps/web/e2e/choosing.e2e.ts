@@ -1,8 +1,9 @@
 import { ARRANGEMENTS, type SetDocument } from '@settlewright/geometry';
 import type { Browser, Page } from 'playwright-core';
 import { afterAll, beforeAll, describe, expect, it } from 'vitest';
-import { openOwner, signUp, unique } from './account.ts';
+import { openOwner, signUp } from './account.ts';
 import { expectAccessible, openBrowser, openVisitor } from './browser.ts';
+import { startProduction } from './productions.ts';
 import { openRoomOf, untilSaved } from './room.ts';
 
 /** Eight people of whom an agency told the height and nothing else. */
@@ -80,14 +81,7 @@ describe('choosing dimensions for people known by their height alone', () => {
     ({ page, complaints } = await openVisitor(browser));
     const { email } = await signUp(page, 'chooser');
     const owner = await openOwner(email);
-    const workshop = `/workshops/${owner.workshopId}`;
-    const production = await owner.post<{ id: string }>(`${workshop}/productions`, {
-      name: unique('The Long Crossing'),
-      summary: '',
-      units: 'feet-inches',
-      roundTo: 8,
-    });
-    const at = `${workshop}/productions/${production.id}`;
+    const { at, home } = await startProduction(owner, 'The Long Crossing');
     const ids: string[] = [];
     for (const [name, bodyData, statureMm] of CAST) {
       const body = { name, bodyData, statureMm, statureSource: 'told' };
@@ -95,7 +89,7 @@ describe('choosing dimensions for people known by their height alone', () => {
     }
     const document = longSaloon(ids);
     const set = await owner.post<{ id: string }>(`${at}/sets`, { name: 'Long saloon', document });
-    room = `/w/${owner.workshopId}/p/${production.id}/sets/${set.id}`;
+    room = `${home}/sets/${set.id}`;
   });
   afterAll(() => browser.close());
 

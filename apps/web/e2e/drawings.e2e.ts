@@ -3,6 +3,7 @@ import type { Browser, Page } from 'playwright-core';
 import { afterAll, beforeAll, describe, expect, it } from 'vitest';
 import { DEMO, openMember, signIn } from './account.ts';
 import { expectAccessible, openBrowser, openVisitor } from './browser.ts';
+import { demoProduction } from './productions.ts';
 import { openRoomOf } from './room.ts';
 
 /** How each kind of file begins. */
@@ -27,14 +28,10 @@ describe('drawings', () => {
     ({ page, complaints } = await openVisitor(browser));
     await signIn(page, DEMO.reviewer.email);
     const member = await openMember(DEMO.reviewer.email);
-    const list = `/workshops/${member.workshopId}/productions`;
-    const { items } = await member.get<{ items: { id: string; name: string }[] }>(list);
-    const production = items.find(({ name }) => name.includes('Larch Junction'));
-    const sets = await member.get<{ items: { id: string; name: string }[] }>(
-      `${list}/${production?.id}/sets`,
-    );
-    const set = sets.items.find(({ name }) => name === 'Dining car');
-    await page.goto(`/w/${member.workshopId}/p/${production?.id}/sets/${set?.id}`);
+    const { at, home } = await demoProduction(member);
+    const { items } = await member.get<{ items: { id: string; name: string }[] }>(`${at}/sets`);
+    const set = items.find(({ name }) => name === 'Dining car');
+    await page.goto(`${home}/sets/${set?.id}`);
     await openRoomOf(page, 'Dining car');
   });
   afterAll(() => browser.close());

@@ -2,6 +2,7 @@ import type { Browser, Locator, Page } from 'playwright-core';
 import { afterAll, beforeAll, describe, expect, it } from 'vitest';
 import { openOwner, signUp, unique } from './account.ts';
 import { expectAccessible, openBrowser, openVisitor } from './browser.ts';
+import { startProduction } from './productions.ts';
 
 const PEOPLE = 120;
 const HEADINGS = ['Person', 'Sex', 'Height', 'Weight', 'Seat to knee'];
@@ -54,18 +55,12 @@ describe('a survey of one’s own', () => {
     ({ page, complaints } = await openVisitor(browser));
     const { email } = await signUp(page, 'surveyor');
     const owner = await openOwner(email);
-    const workshop = `/workshops/${owner.workshopId}`;
-    const production = await owner.post<{ id: string }>(`${workshop}/productions`, {
-      name: unique('The Long Crossing'),
-      summary: '',
-      units: 'feet-inches',
-      roundTo: 8,
-    });
-    const set = await owner.post<{ id: string }>(`${workshop}/productions/${production.id}/sets`, {
+    const { at, home } = await startProduction(owner, 'The Long Crossing');
+    const set = await owner.post<{ id: string }>(`${at}/sets`, {
       name: 'Night train',
       arrangement: 'facing-benches',
     });
-    room = `/w/${owner.workshopId}/p/${production.id}/sets/${set.id}`;
+    room = `${home}/sets/${set.id}`;
   });
   afterAll(() => browser.close());
 

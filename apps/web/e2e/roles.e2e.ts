@@ -1,7 +1,8 @@
 import type { Browser, Page } from 'playwright-core';
 import { afterAll, beforeAll, describe, expect, it } from 'vitest';
-import { DEMO, openMember, signIn, unique } from './account.ts';
+import { DEMO, openMember, signIn } from './account.ts';
 import { openBrowser, openVisitor } from './browser.ts';
+import { startProduction } from './productions.ts';
 import { choose, openRoomOf, sentence, toggleFit } from './room.ts';
 
 /** Numbers nobody would meet by chance: each one, found anywhere, was taken from this person. */
@@ -30,14 +31,8 @@ describe('what carpenter and reviewer see and may do', () => {
   beforeAll(async () => {
     browser = await openBrowser();
     const owner = await openMember(DEMO.owner.email);
-    const list = `/workshops/${owner.workshopId}/productions`;
-    const production = await owner.post<{ id: string }>(list, {
-      name: unique('Roles'),
-      summary: '',
-      units: 'feet-inches',
-      roundTo: 8,
-    });
-    const at = `${list}/${production.id}`;
+    const production = await startProduction(owner, 'Roles');
+    const { at } = production;
     const person = await owner.post<{ id: string }>(`${at}/cast`, SITTER);
     const set = await owner.post<{
       id: string;
@@ -53,7 +48,7 @@ describe('what carpenter and reviewer see and may do', () => {
       },
     });
     await owner.post(`${at}/sets/${set.id}/revisions`, { baseNumber: draft.number, note: 'For the floor.' });
-    home = `/w/${owner.workshopId}/p/${production.id}`;
+    home = production.home;
     room = `${home}/sets/${set.id}`;
   });
   afterAll(() => browser.close());

@@ -1,7 +1,17 @@
 import type { Browser, Page } from 'playwright-core';
 import { afterAll, beforeAll, describe, expect, it } from 'vitest';
 import { DEMO, openMember, signIn, signUp, unique } from './account.ts';
-import { DESK, expectAccessible, linkIn, mailTo, openBrowser, openVisitor, PHONE } from './browser.ts';
+import {
+  DESK,
+  expectAccessible,
+  linkIn,
+  mailTo,
+  openBrowser,
+  openVisitor,
+  PHONE,
+  sidewaysPx,
+} from './browser.ts';
+import { demoProduction } from './productions.ts';
 import { choose, drawer, openRoomOf, sentence, toggleFit } from './room.ts';
 
 const MOST_CALLS = 60;
@@ -16,23 +26,17 @@ interface DemoPlaces {
 
 async function demoPlaces(): Promise<DemoPlaces> {
   const member = await openMember(DEMO.designer.email);
-  const list = `/workshops/${member.workshopId}/productions`;
   const first = async (path: string, named: RegExp): Promise<string> => {
     const { items } = await member.get<{ items: { id: string; name?: string; title?: string }[] }>(path);
     const found = items.find(({ name, title }) => named.test(name ?? title ?? ''));
     if (found === undefined) throw new Error(`${path} lists nothing like ${named.source}.`);
     return found.id;
   };
-  const productionId = await first(
-    `${list}?search=${encodeURIComponent('Larch Junction')}`,
-    /Larch Junction/,
-  );
-  const setId = await first(`${list}/${productionId}/sets`, /^Dining car$/);
-  const orderId = await first(`${list}/${productionId}/orders`, /cushions/i);
-  const workshop = `/w/${member.workshopId}`;
-  const production = `${workshop}/p/${productionId}`;
+  const { at, home: production } = await demoProduction(member);
+  const setId = await first(`${at}/sets`, /^Dining car$/);
+  const orderId = await first(`${at}/orders`, /cushions/i);
   return {
-    workshop,
+    workshop: `/w/${member.workshopId}`,
     production,
     room: `${production}/sets/${setId}`,
     order: `${production}/orders/${orderId}`,
@@ -54,8 +58,7 @@ describe('every screen', () => {
     await of.evaluate(() => document.fonts.ready);
   };
   const expectNoSidewaysScroll = async (of = page) => {
-    const wider = await of.evaluate(() => document.documentElement.scrollWidth - innerWidth);
-    expect(wider, of.url()).toBeLessThanOrEqual(0);
+    expect(await sidewaysPx(of), of.url()).toBeLessThanOrEqual(0);
   };
   const openRoom = async (search = '') => {
     await page.goto(`${at.room}${search}`);

@@ -1,7 +1,8 @@
 import type { Browser, BrowserContext, Page } from 'playwright-core';
 import { afterAll, beforeAll, describe, expect, it } from 'vitest';
-import { DEMO, openMember, signIn, unique } from './account.ts';
+import { DEMO, openMember, signIn } from './account.ts';
 import { expectAccessible, openBrowser, openVisitor } from './browser.ts';
+import { startProduction } from './productions.ts';
 import { choose, numberSaid, openRoomOf, setNumber, untilSaved } from './room.ts';
 
 interface Hand {
@@ -19,18 +20,12 @@ describe('two people at one set', () => {
   beforeAll(async () => {
     browser = await openBrowser();
     const owner = await openMember(DEMO.owner.email);
-    const home = `/workshops/${owner.workshopId}/productions`;
-    const production = await owner.post<{ id: string }>(home, {
-      name: unique('Two hands'),
-      summary: '',
-      units: 'feet-inches',
-      roundTo: 8,
-    });
-    const set = await owner.post<{ id: string }>(`${home}/${production.id}/sets`, {
+    const { at, home } = await startProduction(owner, 'Two hands');
+    const set = await owner.post<{ id: string }>(`${at}/sets`, {
       name: 'Night train',
       arrangement: 'facing-benches',
     });
-    room = `/w/${owner.workshopId}/p/${production.id}/sets/${set.id}`;
+    room = `${home}/sets/${set.id}`;
     const enter = async (email: string): Promise<Hand> => {
       const hand = await openVisitor(browser);
       await signIn(hand.page, email);

@@ -2,7 +2,8 @@ import { ARRANGEMENTS, seatSitter, type SitterRef } from '@settlewright/geometry
 import type { Browser, Page } from 'playwright-core';
 import { afterAll, beforeAll, describe, expect, it } from 'vitest';
 import { DEMO, openMember, signIn, unique } from './account.ts';
-import { expectAccessible, openBrowser, openVisitor, PHONE } from './browser.ts';
+import { expectAccessible, openBrowser, openVisitor, PHONE, sidewaysPx } from './browser.ts';
+import { demoProduction } from './productions.ts';
 import { openRoomOf } from './room.ts';
 
 const sitter = (percentile: number): SitterRef => ({
@@ -22,12 +23,8 @@ describe('ways in', () => {
   beforeAll(async () => {
     browser = await openBrowser();
     const designer = await openMember(DEMO.designer.email);
-    const productions = `/workshops/${designer.workshopId}/productions`;
-    const { items } = await designer.get<{ items: { id: string }[] }>(
-      `${productions}?search=Larch%20Junction`,
-    );
-    const productionId = items[0]?.id ?? '';
-    const sets = `${productions}/${productionId}/sets`;
+    const { at, home } = await demoProduction(designer);
+    const sets = `${at}/sets`;
     const booth = ARRANGEMENTS.find(({ id }) => id === 'u-booth')?.build();
     if (!booth) throw new Error('The booth is gone.');
     const table = booth.pieces.map((piece) =>
@@ -44,7 +41,7 @@ describe('ways in', () => {
     );
     const { id } = await designer.post<{ id: string }>(sets, { name, document });
     putAway = () => designer.post(`${sets}/${id}/archive`, {});
-    path = `/w/${designer.workshopId}/p/${productionId}/sets/${id}`;
+    path = `${home}/sets/${id}`;
     ({ page } = await openVisitor(browser));
     await signIn(page, DEMO.designer.email);
   });
@@ -68,8 +65,6 @@ describe('ways in', () => {
 
     await page.setViewportSize(PHONE);
     // The drawing takes its new size a frame later.
-    await expect
-      .poll(() => page.evaluate(() => document.documentElement.scrollWidth - innerWidth))
-      .toBeLessThanOrEqual(0);
+    await expect.poll(() => sidewaysPx(page)).toBeLessThanOrEqual(0);
   });
 });
