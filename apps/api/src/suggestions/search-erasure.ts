@@ -3,8 +3,8 @@ import type { KeptRow } from '../common/kept-text';
 import { UNFINISHED } from '../jobs/job-states';
 import { changedWords } from '../populations/population-texts';
 import { DimensionSearch } from './entities/dimension-search.entity';
-import { SearchTries } from './entities/search-tries.entity';
 import type { Found, KeptTried } from './search-question';
+import { endSearch } from './search-rows';
 
 const ERASED = 'Somebody was erased from the workshop meanwhile: begin it again.';
 
@@ -26,14 +26,11 @@ export async function removeFromSearches(
     .setLock('pessimistic_write', undefined, ['search'])
     .getMany();
   for (const { id, state, served, found } of searches) {
-    const changes: Partial<DimensionSearch> = {};
-    if (found && served.some((one) => one.id === castId)) changes.found = without(found, castId);
+    const isServed = served.some((one) => one.id === castId);
+    const emptied = found && isServed ? { found: without(found, castId) } : undefined;
     if (UNFINISHED.includes(state)) {
-      const ended = { state: 'failed', fault: ERASED, question: null, digest: null } as const;
-      Object.assign(changes, ended, { endedAt: new Date() });
-      await manager.delete(SearchTries, { searchId: id });
-    }
-    if (Object.keys(changes).length > 0) await manager.save(DimensionSearch, { id, ...changes });
+      await endSearch(manager, id, { ...emptied, state: 'failed', fault: ERASED });
+    } else if (emptied) await manager.save(DimensionSearch, { id, ...emptied });
   }
 }
 

@@ -1,7 +1,7 @@
 import type { Tried } from '@settlewright/geometry';
 import { Injectable } from '@nestjs/common';
 import { InjectDataSource } from '@nestjs/typeorm';
-import { DataSource, type EntityManager } from 'typeorm';
+import { DataSource } from 'typeorm';
 import { ABANDONED, abandonedIds } from '../jobs/abandoned';
 import type { Taken } from '../jobs/job-queue';
 import { UNFINISHED } from '../jobs/job-states';
@@ -11,6 +11,7 @@ import { SearchTries } from './entities/search-tries.entity';
 import type { SearchPart } from './searcher';
 import type { SearchQuestion } from './search-question';
 import { type PartJob, SearchQueue } from './search-queue';
+import { endSearch, locked } from './search-rows';
 
 /** Before searches that have not begun, so that the people of one need not be drawn again in between. */
 const GOES_ON = 1;
@@ -45,7 +46,7 @@ export class SearchParts {
       if (isOver) return;
       const progress = { done, most: of, found };
       if (ended) {
-        await this.end(manager, searchId, { ...progress, state: 'done' });
+        await endSearch(manager, searchId, { ...progress, state: 'done' });
         return;
       }
       await manager.insert(SearchTries, { searchId, part, tried });
@@ -58,7 +59,7 @@ export class SearchParts {
     await this.dataSource.transaction(async (manager) => {
       const search = await locked(manager, searchId);
       if (search && UNFINISHED.includes(search.state)) {
-        await this.end(manager, searchId, { state: 'failed', fault });
+        await endSearch(manager, searchId, { state: 'failed', fault });
       }
     });
   }
@@ -69,16 +70,4 @@ export class SearchParts {
       await this.fail(id, ABANDONED);
     }
   }
-
-  /** Part of the caller's transaction: the search is over; what was only needed to go on with it goes. */
-  async end(manager: EntityManager, searchId: string, changes: Partial<DimensionSearch>): Promise<void> {
-    await manager.delete(SearchTries, { searchId });
-    const ended = { ...changes, question: null, digest: null, endedAt: new Date() };
-    await manager.save(DimensionSearch, { id: searchId, ...ended });
-  }
-}
-
-/** The search, kept from other writers until the transaction ends. */
-export function locked(manager: EntityManager, id: string): Promise<DimensionSearch | null> {
-  return manager.findOne(DimensionSearch, { where: { id }, lock: { mode: 'pessimistic_write' } });
 }

@@ -6,6 +6,7 @@ import { womenPercentOf } from '../studies/read-mix';
 import { toldPopulation } from '../studies/told-population';
 import type { StartSuggestionDto } from './dto/start-suggestion.dto';
 import { DimensionSearch } from './entities/dimension-search.entity';
+import { SearchTries } from './entities/search-tries.entity';
 import type { SearchQuestion, ToldDimension, ToldSitter } from './search-question';
 
 /** So that one workshop does not keep the others waiting. */
@@ -61,4 +62,20 @@ export async function makeRoom(manager: EntityManager, workshopId: string, setId
        SELECT id FROM dimension_searches WHERE set_id = $1 ORDER BY started_at DESC, id LIMIT $2)`,
     [setId, LISTED - 1],
   );
+}
+
+/** The search, kept from other writers until the transaction ends. */
+export function locked(manager: EntityManager, id: string): Promise<DimensionSearch | null> {
+  return manager.findOne(DimensionSearch, { where: { id }, lock: { mode: 'pessimistic_write' } });
+}
+
+/** Part of the caller's transaction: the search is over; what was only needed to go on with it goes. */
+export async function endSearch(
+  manager: EntityManager,
+  searchId: string,
+  changes: Partial<DimensionSearch>,
+): Promise<void> {
+  await manager.delete(SearchTries, { searchId });
+  const ended = { ...changes, question: null, digest: null, endedAt: new Date() };
+  await manager.save(DimensionSearch, { id: searchId, ...ended });
 }

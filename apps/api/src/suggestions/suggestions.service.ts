@@ -23,8 +23,7 @@ import type { StartSuggestionDto } from './dto/start-suggestion.dto';
 import { ListedSuggestionDto, SuggestionDto } from './dto/suggestion.dto';
 import { DimensionSearch } from './entities/dimension-search.entity';
 import { readSearch } from './read-search';
-import { begunSearch, makeRoom } from './search-rows';
-import { locked, SearchParts } from './search-parts.service';
+import { begunSearch, endSearch, locked, makeRoom } from './search-rows';
 import { SearchQueue } from './search-queue';
 
 @Injectable()
@@ -38,7 +37,6 @@ export class SuggestionsService {
     private readonly populations: PopulationsService,
     private readonly cast: CastService,
     private readonly fit: FitCheckService,
-    private readonly parts: SearchParts,
     private readonly queue: SearchQueue,
     private readonly version: WorkVersion,
     private readonly audit: AuditService,
@@ -112,7 +110,7 @@ export class SuggestionsService {
         const detail = `This search is ${search.state}; accepted: one that is queued or running.`;
         throw Problem.conflict('search-ended', detail, { state: search.state });
       }
-      await this.parts.end(manager, id, { state: 'cancelled' });
+      await endSearch(manager, id, { state: 'cancelled' });
       await this.record(manager, member, 'suggestion.cancelled', id);
     });
     return this.get(member, productionId, setId, id);
