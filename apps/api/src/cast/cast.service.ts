@@ -13,6 +13,7 @@ import { ProductionsService } from '../productions/productions.service';
 import { readCastCsv, type ReadCsv } from './csv/read-cast-csv';
 import type { CreateCastMemberDto, PatchCastMemberDto } from './dto/save-cast-member.dto';
 import { CastMember, type TapeMeasures } from './entities/cast-member.entity';
+import { USUAL_SHOE_MM } from './limits';
 import { readMeasured } from './measured';
 
 /** Erased people stay in sight only while a draft still has them at a place. */
@@ -20,8 +21,6 @@ const STILL_SEATED = `EXISTS (
   SELECT 1 FROM sets s JOIN set_drafts d ON d.set_id = s.id AND d.number = s.draft_number
   WHERE s.production_id = person.production_id AND d.document->'seating' @>
     jsonb_build_array(jsonb_build_object('sitter', jsonb_build_object('castId', person.id::text))))`;
-
-const SHOE_MM = 25;
 
 @Injectable()
 export class CastService {
@@ -66,7 +65,7 @@ export class CastService {
           weightKg: dto.weightKg ?? null,
           age: dto.age ?? null,
           measured,
-          shoeMm: dto.shoeMm ?? SHOE_MM,
+          shoeMm: dto.shoeMm ?? USUAL_SHOE_MM,
           clothing: dto.clothing ?? 'light',
           notes: dto.notes ?? '',
           colour: dto.colour ?? leastWornColour(worn),
@@ -128,7 +127,7 @@ export class CastService {
         if (!value) return [];
         const colour = leastWornColour(worn);
         worn.push(colour);
-        const { statureMm = null, weightKg = null, age = null, shoeMm = SHOE_MM } = value;
+        const { statureMm = null, weightKg = null, age = null, shoeMm = USUAL_SHOE_MM } = value;
         return [
           manager.create(CastMember, { ...value, productionId, statureMm, weightKg, age, shoeMm, colour }),
         ];
@@ -200,7 +199,7 @@ export class CastService {
         weightKg: null,
         age: null,
         measured: {},
-        shoeMm: SHOE_MM,
+        shoeMm: USUAL_SHOE_MM,
         clothing: 'light',
         notes: '',
         removedAt: new Date(),

@@ -16,6 +16,8 @@ export const WEIGHT_LIMIT: Limit = { label: 'Weight', min: 25, max: 300, unit: '
 /** From the youngest whom adults' body data describe. */
 export const AGE_LIMIT: Limit = { label: 'Age', min: 16, max: 110, unit: 'years' };
 export const SHOE_LIMIT: Limit = { label: 'Shoe height', min: 0, max: 150, unit: 'mm' };
+/** Shoe height of somebody whose is not told. */
+export const USUAL_SHOE_MM = 25;
 
 export const TAPE_LIMITS: Record<TapeMeasureKey, Limit> = {
   sitting_height: { label: 'Sitting height', min: 500, max: 1200, unit: 'mm' },

@@ -2,6 +2,7 @@ import type { KnownPerson } from '@settlewright/anthropometry';
 import { Injectable } from '@nestjs/common';
 import { CastService } from '../cast/cast.service';
 import { type CastPerson, castPerson } from '../cast/known-person';
+import { USUAL_SHOE_MM } from '../cast/limits';
 import { readMeasured } from '../cast/measured';
 import type { MemberInfo } from '../common/access.decorator';
 import { Problem, type ProblemField } from '../common/problem';
@@ -9,8 +10,6 @@ import { FitCheckService } from '../fit-checks/fit-check.service';
 import { answerFields } from './answer-fields';
 import type { AskStandInDto, StandInDto, StrangerDto } from './dto/stand-in.dto';
 import { type Version, type VersionPlace, VersionsService } from './versions.service';
-
-const SHOE_MM = 25;
 
 /** How far the sit of somebody else can be trusted for a cast member. */
 @Injectable()
@@ -94,7 +93,7 @@ function stranger(dto: StrangerDto): KnownPerson {
     ...(typeof dto.weightKg === 'number' ? { weightKg: dto.weightKg } : {}),
     ...(typeof dto.age === 'number' ? { age: dto.age } : {}),
     measured: Object.fromEntries(Object.entries(read.value).map(([key, { mm }]) => [key, mm])),
-    shoeMm: dto.shoeMm ?? SHOE_MM,
+    shoeMm: dto.shoeMm ?? USUAL_SHOE_MM,
     clothing: dto.clothing ?? 'light',
   };
 }

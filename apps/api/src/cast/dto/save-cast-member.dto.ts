@@ -5,7 +5,16 @@ import { IsIn, IsInt, IsObject, IsOptional, Max, Min } from 'class-validator';
 import { TextField } from '../../common/text-field';
 import { BODY_DATA, CLOTHING, STATURE_SOURCES, type StatureSource } from '../entities/cast-member.entity';
 import { WithinLimit } from '../limit.decorator';
-import { AGE_LIMIT, NAME_MAX, NOTES_MAX, ROLE_MAX, SHOE_LIMIT, STATURE_LIMIT, WEIGHT_LIMIT } from '../limits';
+import {
+  AGE_LIMIT,
+  NAME_MAX,
+  NOTES_MAX,
+  ROLE_MAX,
+  SHOE_LIMIT,
+  STATURE_LIMIT,
+  USUAL_SHOE_MM,
+  WEIGHT_LIMIT,
+} from '../limits';
 import { measuredSchema } from './measured.schema';
 
 export class CreateCastMemberDto {
@@ -63,7 +72,7 @@ export class CreateCastMemberDto {
   @IsObject()
   measured?: Record<string, unknown>;
 
-  @ApiPropertyOptional({ minimum: SHOE_LIMIT.min, maximum: SHOE_LIMIT.max, default: 25 })
+  @ApiPropertyOptional({ minimum: SHOE_LIMIT.min, maximum: SHOE_LIMIT.max, default: USUAL_SHOE_MM })
   @IsOptional()
   @WithinLimit(SHOE_LIMIT)
   shoeMm?: number;
