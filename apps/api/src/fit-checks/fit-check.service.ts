@@ -2,6 +2,7 @@ import { setImmediate } from 'node:timers/promises';
 import {
   type BodyModel,
   checkSet,
+  type CheckSettings,
   checkSitter,
   createBodyModel,
   type FitSheet,
@@ -40,6 +41,12 @@ export interface Turns {
 
 const RECENT = 500;
 
+/** What a set is checked for, and how sure its verdicts must be; null: as sure as the rule book asks. */
+const settingsOf = ({ asked }: SetDocument, confidence: number | null): CheckSettings => ({
+  ...asked,
+  ...(confidence === null ? {} : { confidence }),
+});
+
 /** Makes fit sheets on the server, so that verdicts can be shown to people who may not see measures. */
 @Injectable()
 export class FitCheckService {
@@ -59,7 +66,7 @@ export class FitCheckService {
       sitters: this.sitters(document, cast),
       ruleBook: this.ruleBook,
       model: this.model,
-      settings: { ...document.asked, ...(confidence === null ? {} : { confidence }) },
+      settings: settingsOf(document, confidence),
       sittersOnly,
     });
   }
@@ -77,7 +84,7 @@ export class FitCheckService {
         place,
         ruleBook: this.ruleBook,
         model: this.model,
-        settings: { ...document.asked, ...(confidence === null ? {} : { confidence }) },
+        settings: settingsOf(document, confidence),
       })
     );
   }
@@ -93,7 +100,7 @@ export class FitCheckService {
     turns: Turns,
   ): AsyncGenerator<SitterNext> {
     const { ruleBook, model } = this;
-    const settings = { ...document.asked, ...(confidence === null ? {} : { confidence }) };
+    const settings = settingsOf(document, confidence);
     const input = { situation: measureSet(document, ruleBook), ruleBook, model, settings };
     const asked = digest([document, confidence]);
     for (const sitter of this.sitters(document, cast)) {
