@@ -19,9 +19,9 @@ import { PopulationsService } from '../populations/populations.service';
 import { readMix, womenPercentOf } from '../studies/read-mix';
 import { STUDY_WEAR, studyCrowd } from '../studies/study-question';
 
-/** Whom a share is about. */
-export interface AskedCrowd {
-  populationId: string;
+/** Whom a share is about; no shares are asked for when no population is named. */
+interface AskedCrowd {
+  populationId?: string | undefined;
   womenPercent?: number | undefined;
 }
 
@@ -58,7 +58,11 @@ export class CrowdShares {
   ) {}
 
   /** The people that are meant, or what is wrong with the request. */
-  async crowd(member: MemberInfo, { populationId, womenPercent }: AskedCrowd): Promise<NamedCrowd> {
+  async crowd(
+    member: MemberInfo,
+    { populationId, womenPercent }: AskedCrowd,
+  ): Promise<NamedCrowd | undefined> {
+    if (populationId === undefined) return undefined;
     const data = await this.populations.crowd(member.workshopId, populationId);
     const { mix, faults } = readMix(data, womenPercent);
     if (faults.length > 0) throw Problem.invalid(faults);

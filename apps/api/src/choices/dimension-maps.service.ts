@@ -43,11 +43,7 @@ export class DimensionMaps {
     const { document } = version;
     const { across, up } = readBoth(document, asked);
     if (fineness === COARSE) refuseUnlikeUnits(across, up);
-    const { populationId, womenPercent } = asked;
-    const crowd =
-      populationId === undefined
-        ? undefined
-        : await this.crowds.crowd(member, { populationId, womenPercent });
+    const crowd = await this.crowds.crowd(member, asked);
     refuseTooMuch(document, fineness.gridValues(across).length * fineness.gridValues(up).length, 'up');
     await this.limits.take('tried-sets', member.userId);
     const map = await this.map(version, { across, up, everyCheck: asked.everyCheck ?? false, fineness });

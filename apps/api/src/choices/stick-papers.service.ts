@@ -2,7 +2,6 @@ import { Injectable } from '@nestjs/common';
 import type { MemberInfo } from '../common/access.decorator';
 import { FitCheckService } from '../fit-checks/fit-check.service';
 import { type ConfidenceSince, confidenceSentence } from '../fit-checks/shown-sheet';
-import { ProductionsService } from '../productions/productions.service';
 import { WorkshopsService } from '../workshops/workshops.service';
 import { answerFields } from './answer-fields';
 import type { AskStickDto } from './dto/asked.dto';
@@ -19,7 +18,6 @@ export class StickPapers {
   constructor(
     private readonly sticks: StorySticks,
     private readonly fit: FitCheckService,
-    private readonly productions: ProductionsService,
     private readonly workshops: WorkshopsService,
   ) {}
 
@@ -39,8 +37,7 @@ export class StickPapers {
     place: VersionPlace,
     asked: AskStickDto,
   ): Promise<{ name: string; content: Buffer }> {
-    const { version, style, stick } = await this.sticks.of(member, place, asked);
-    const production = await this.productions.forReading(member, place.productionId);
+    const { version, production, style, stick } = await this.sticks.of(member, place, asked);
     const workshop = await this.workshops.get(member.workshopId);
     const { confidenceSetAt, timeZone } = workshop;
     const since: ConfidenceSince | null =

@@ -13,6 +13,7 @@ import { seesMeasures } from '../cast/sees-measures';
 import type { MemberInfo } from '../common/access.decorator';
 import { Problem } from '../common/problem';
 import { FitCheckService } from '../fit-checks/fit-check.service';
+import type { Production } from '../productions/entities/production.entity';
 import { ProductionsService } from '../productions/productions.service';
 import { RateLimits } from '../rate-limits/rate-limits.service';
 import { CrowdShares, type NamedCrowd } from './crowd-shares.service';
@@ -40,7 +41,7 @@ export class StorySticks {
     member: MemberInfo,
     place: VersionPlace,
     asked: AskStickDto,
-  ): Promise<{ version: Version; style: LengthStyle; stick: ShownStick }> {
+  ): Promise<{ version: Version; production: Production; style: LengthStyle; stick: ShownStick }> {
     const version = await this.versions.find(member, { ...place, draftNumber: asked.draftNumber });
     const production = await this.productions.forReading(member, place.productionId);
     const style: LengthStyle = {
@@ -51,21 +52,16 @@ export class StorySticks {
     const dimension = readDimension(version.document, asked);
     const rule = this.readRule(dimension, asked.ruleId);
     const value = readValue(dimension, asked.value, fineness);
-    const crowd = await this.readCrowd(member, asked);
+    const crowd = await this.crowds.crowd(member, asked);
     // Code clauses and what is usual read nobody's body, and are looked at finely for everybody.
     const seen = fineness.stickValues(dimension);
     const values = [...new Set([...fine(style).stickValues(dimension), ...seen])].sort((a, b) => a - b);
     refuseTooMuch(version.document, values.length, 'dimension');
     await this.limits.take('tried-sets', member.userId);
     const stick = await this.stick(version, { dimension, values, seen, value, rule, fineness, style });
-    if (!crowd) return { version, style, stick };
+    if (!crowd) return { version, production, style, stick };
     const shares = await this.shares(version.document, crowd, { stick, style });
-    return { version, style, stick: { ...stick, shares } };
-  }
-
-  private async readCrowd(member: MemberInfo, asked: AskStickDto): Promise<NamedCrowd | undefined> {
-    const { populationId, womenPercent } = asked;
-    return populationId === undefined ? undefined : this.crowds.crowd(member, { populationId, womenPercent });
+    return { version, production, style, stick: { ...stick, shares } };
   }
 
   /** A rule of a person; those about benches and tables have no stretch of a sitter. */
