@@ -5,7 +5,7 @@ import { readQuestion } from './read-question';
 const bay = ARRANGEMENTS.find(({ id }) => id === 'facing-benches')?.build() as SetDocument;
 const bench = bay.pieces.find(({ kind }) => kind === 'bench');
 const asked = { populationId: 'us-civilians-2015', people: 1000, draftNumber: 1 };
-const counting = { blockPeople: 1000, ruleVersion: '1', workVersion: '1-1' };
+const counting = { blockPeople: 1000, workVersion: '1-1' };
 
 /** So many benches, far apart; each with a deck of its own where they are to be unlike. */
 function row(benches: number, stepMm: number): SetDocument {

@@ -14,11 +14,7 @@ export function readQuestion(
   dto: StartStudyDto,
   document: SetDocument,
   crowd: CrowdData,
-  {
-    blockPeople,
-    ruleVersion,
-    workVersion,
-  }: Pick<StudyQuestion, 'blockPeople' | 'ruleVersion' | 'workVersion'>,
+  { blockPeople, workVersion }: Pick<StudyQuestion, 'blockPeople' | 'workVersion'>,
 ): StudyQuestion {
   const { places } = measureSet(document);
   const { mix, faults: mixFaults } = readMix(crowd, dto.womenPercent);
@@ -32,7 +28,6 @@ export function readQuestion(
   const { lensHeightMm } = document.asked;
   return {
     workVersion,
-    ruleVersion,
     crowd,
     ...mix,
     people,

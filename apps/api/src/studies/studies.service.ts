@@ -57,7 +57,6 @@ export class StudiesService {
     const crowd = await this.populations.crowd(member.workshopId, dto.populationId);
     const question = readQuestion(dto, document, crowd, {
       blockPeople: this.config.studyBlockPeople,
-      ruleVersion: this.counter.ruleBook.version,
       workVersion: this.version.own,
     });
     const study = this.begun(member, setId, dto, question);
@@ -106,7 +105,7 @@ export class StudiesService {
   }
 
   private begun(member: MemberInfo, setId: string, dto: StartStudyDto, question: StudyQuestion): Study {
-    const { people, seed, ruleVersion } = question;
+    const { people, seed } = question;
     return this.studies.create({
       setId,
       draftNumber: dto.draftNumber ?? null,
@@ -117,7 +116,7 @@ export class StudiesService {
       seed,
       ruleIds: dto.ruleIds ?? null,
       placeIds: dto.placeIds ?? null,
-      ruleVersion,
+      ruleVersion: this.counter.ruleBook.version,
       state: 'queued',
       blocks: blocksOf(question),
       blocksDone: 0,

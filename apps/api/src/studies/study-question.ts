@@ -15,8 +15,6 @@ export const STUDY_WEAR = { women: CROWD_WEAR, men: CROWD_WEAR };
 export interface StudyQuestion {
   /** Version of the work, so that all blocks are counted alike. */
   workVersion: string;
-  /** Version of the fit rules that everybody counts with. */
-  ruleVersion: string;
   crowd: CrowdData;
   /** Share of women, 0 to 1; absent for a population of one sex. */
   womenShare?: number;
