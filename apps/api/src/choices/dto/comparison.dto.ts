@@ -12,6 +12,7 @@ import {
   ValidateNested,
 } from 'class-validator';
 import { MayBeLeftOut } from '../../common/may-be-left-out';
+import { CELL_STATES } from '../../fit-checks/cell-states';
 import { CountsDto } from '../../sets/dto/fit-sheet.dto';
 import { VersionStateDto } from './choice-answer.dto';
 
@@ -88,8 +89,6 @@ export class DocumentChangeDto {
   to?: unknown;
 }
 
-const STATES = ['fits', 'tight', 'wontFit', 'notKnown', 'inside', 'outside', 'gone'];
-
 export class TurnedCheckDto {
   @ApiProperty()
   ruleId: string;
@@ -97,9 +96,9 @@ export class TurnedCheckDto {
   name: string;
   @ApiProperty({ type: [String] })
   marks: string[];
-  @ApiProperty({ enum: STATES })
+  @ApiProperty({ enum: CELL_STATES })
   from: string;
-  @ApiProperty({ enum: STATES, description: '`gone` where the second version no longer answers' })
+  @ApiProperty({ enum: CELL_STATES, description: '`gone` where the second version no longer answers' })
   to: string;
   @ApiPropertyOptional({
     type: Number,

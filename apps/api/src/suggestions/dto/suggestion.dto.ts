@@ -2,20 +2,11 @@ import type { AnswerKind, CellState, Dimension } from '@settlewright/geometry';
 import { ApiProperty, ApiPropertyOptional } from '@nestjs/swagger';
 import { seesMeasures } from '../../cast/sees-measures';
 import type { MemberInfo } from '../../common/access.decorator';
+import { CELL_STATES } from '../../fit-checks/cell-states';
 import { DocumentJobDto, documentJobFields } from '../../jobs/dto/document-job.dto';
 import { ToldPopulationDto } from '../../studies/dto/study.dto';
 import type { DimensionSearch } from '../entities/dimension-search.entity';
 import type { KeptTried, ToldDimension, ToldSitter } from '../search-question';
-
-const STATES = [
-  'fits',
-  'tight',
-  'wontFit',
-  'notKnown',
-  'inside',
-  'outside',
-  'gone',
-] as const satisfies CellState[];
 
 export class FreeDimensionDto {
   @ApiProperty()
@@ -121,9 +112,9 @@ export class ChoiceDto {
 export class CheckChangeDto {
   @ApiProperty()
   ruleId: string;
-  @ApiProperty({ enum: STATES })
+  @ApiProperty({ enum: CELL_STATES })
   from: CellState;
-  @ApiProperty({ enum: STATES })
+  @ApiProperty({ enum: CELL_STATES })
   to: CellState;
 }
 
