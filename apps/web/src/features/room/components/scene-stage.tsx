@@ -1,5 +1,5 @@
 import { tapeLines, type Piece } from '@settlewright/geometry';
-import { lazy, Suspense, useId, useMemo, useRef, useState, type KeyboardEvent } from 'react';
+import { lazy, Suspense, useId, useMemo, useRef, useState } from 'react';
 import { LoadingLine } from '@/components/loading.tsx';
 import { useTheme } from '@/lib/theme.ts';
 import { joinWords } from '../choosing-words.ts';
@@ -7,6 +7,7 @@ import type { Choosing } from '../hooks/use-choosing.ts';
 import type { GroupActions } from '../hooks/use-group-actions.ts';
 import type { PieceActions } from '../hooks/use-piece-actions.ts';
 import { useSceneHand } from '../hooks/use-scene-hand.ts';
+import { useStageKeys } from '../hooks/use-stage-keys.ts';
 import { useView } from '../hooks/use-view.ts';
 import type { RoomAddress } from '../hooks/use-address.ts';
 import { Overlay } from '../overlay/overlay.tsx';
@@ -19,7 +20,7 @@ import { WayOnScene } from '../ways/way-on-scene.tsx';
 import { EyeMark } from './eye-mark.tsx';
 import { SceneErrorBoundary } from './scene-error-boundary.tsx';
 import { ScaleBar } from './scale-bar.tsx';
-import { Toggle } from './toggle.tsx';
+import { StageTools } from './stage-tools.tsx';
 import { TextTwin } from './text-twin.tsx';
 
 /** The drawing has no frame: it fades into the paper at the edges of the sheet. */
@@ -45,7 +46,7 @@ interface Props {
 
 /** The drawing, what stands over it and what can be done to it. */
 export function SceneStage({ picture, piece, address, actions, several, onOpenCell }: Props) {
-  const { style, canEdit, maker } = useSurroundings();
+  const { style, maker } = useSurroundings();
   const theme = useTheme((state) => state.choice);
   const lit = useRoom((state) => state.litCellId);
   const sheet = useRef<HTMLDivElement>(null);
@@ -83,41 +84,7 @@ export function SceneStage({ picture, piece, address, actions, several, onOpenCe
       : [];
   const bodies = showBodies ? picture.bodies.filter((body) => isBehind(body.crownMm, view.cut)) : [];
 
-  function keys(event: KeyboardEvent<HTMLDivElement>) {
-    if (event.target !== event.currentTarget) return;
-    if (event.key === 'Escape') {
-      hand.cancel();
-      if (!hand.isDragging()) address.select(undefined);
-      return;
-    }
-    if (event.key === 'a' && (event.ctrlKey || event.metaKey) && several) {
-      several.choosing.chooseAll();
-      event.preventDefault();
-      return;
-    }
-    if (event.ctrlKey || event.metaKey || !piece || !canEdit) return;
-    const size = event.shiftKey ? 8 : 1;
-    const moves: Record<string, [number, number]> = {
-      ArrowLeft: [-size, 0],
-      ArrowRight: [size, 0],
-      ArrowUp: [0, -size],
-      ArrowDown: [0, size],
-    };
-    const move = moves[event.key];
-    if (group) {
-      const { pieces } = group.choosing;
-      if (move) group.actions.nudge(pieces, ...move);
-      else if (event.key === ',') group.actions.turn(pieces, 15);
-      else if (event.key === '.') group.actions.turn(pieces, -15);
-      else if (event.key === 'Delete' || event.key === 'Backspace') group.actions.remove(pieces);
-      else return;
-    } else if (move && !piece.locked) actions.nudge(piece, ...move);
-    else if (event.key === ',' && !piece.locked) actions.turn(piece, 15);
-    else if (event.key === '.' && !piece.locked) actions.turn(piece, -15);
-    else if (event.key === 'Delete' || event.key === 'Backspace') actions.remove(piece);
-    else return;
-    event.preventDefault();
-  }
+  const keys = useStageKeys({ piece, address, hand, actions, choosing: several?.choosing, group });
 
   return (
     <section aria-label="Drawing of the set" className="flex min-h-0 flex-1 flex-col">
@@ -197,60 +164,15 @@ export function SceneStage({ picture, piece, address, actions, several, onOpenCe
         />
         {isToScale(letter) && <ScaleBar controller={view.controller} style={style} />}
       </div>
-      <div className="flex flex-wrap items-center justify-end gap-x-5 gap-y-1 py-1.5 text-sm text-ink-2">
-        {several && (
-          <Toggle on={several.choosing.several} onChange={several.choosing.setSeveral}>
-            Choose several
-          </Toggle>
-        )}
-        <Toggle on={showBodies} onChange={setShowBodies}>
-          Bodies
-        </Toggle>
-        {/* Whoever sees verdicts alone may have none to show. */}
-        {tapes.length > 0 && !clientView && (
-          <Toggle on={showTapes} onChange={setShowTapes}>
-            Tapes
-          </Toggle>
-        )}
-        <Toggle on={clientView} onChange={address.setClientView}>
-          Client view
-        </Toggle>
-        <span className="flex items-center gap-1 border-l border-ink pl-3">
-          <ZoomButton name="Smaller" onPress={() => view.zoomBy(1 / 1.25)}>
-            −
-          </ZoomButton>
-          <ZoomButton name="Fit the set into the sheet" onPress={view.fit}>
-            Fit
-          </ZoomButton>
-          <ZoomButton name="Larger" onPress={() => view.zoomBy(1.25)}>
-            +
-          </ZoomButton>
-          {letter === 'E' && (
-            <>
-              <ZoomButton name="Walk to the left" onPress={() => view.turnBy(-0.26, 0)}>
-                ←
-              </ZoomButton>
-              <ZoomButton name="Walk to the right" onPress={() => view.turnBy(0.26, 0)}>
-                →
-              </ZoomButton>
-            </>
-          )}
-        </span>
-      </div>
+      <StageTools
+        address={address}
+        view={view}
+        choosing={several?.choosing}
+        bodies={{ shown: showBodies, show: setShowBodies }}
+        // Whoever sees verdicts alone may have none to show.
+        tapes={tapes.length > 0 && !clientView ? { shown: showTapes, show: setShowTapes } : undefined}
+      />
       <TextTwin id={about} picture={picture} tapes={clientView ? [] : tapes} onOpenCell={onOpenCell} />
     </section>
-  );
-}
-
-function ZoomButton({ name, onPress, children }: { name: string; onPress: () => void; children: string }) {
-  return (
-    <button
-      type="button"
-      aria-label={name}
-      onClick={onPress}
-      className="quick min-h-8 min-w-8 rounded-sm px-1.5 font-medium hover:bg-sunk hover:text-ink"
-    >
-      {children}
-    </button>
   );
 }

@@ -55,6 +55,8 @@ function snapTogether(base: SetDocument, piece: Piece, pieces: readonly Piece[],
   return Math.abs(snapped.at.turnDeg - to.turnDeg) < 1e-9 ? snapped : { at: to };
 }
 
+export type SceneHand = ReturnType<typeof useSceneHand>;
+
 /** Clicking, dragging pieces over the floor, and moving the sheet: kept out of React until let go. */
 export function useSceneHand(options: {
   picture: RoomPicture;
