@@ -33,8 +33,17 @@ export const CUSHION_SETTINGS = {
   weltStrip: inches(3 / 2, 'width of the welt strip', 'published source'),
   clothWidth: inches(54, 'width of the cloth', 'published source'),
   boardSmaller: inches(1 / 2, 'board smaller than finished, in width and in depth', 'from memory'),
+  tightBoxing: inches(1 / 4, 'tight boxing cut higher than the foam, seams included', 'published source'),
+  boardFoamOver: inches(3 / 8, 'foam larger than its board, on every side', 'published source'),
+  pull: inches(5 / 2, 'cover pulled round and stapled under the board', 'published source'),
   buttonToEdge: inches(4, 'least distance of a button from the edge', 'from memory'),
 } as const satisfies Record<string, CushionSetting>;
+
+/** Part of the thickness that a knife edge gets at every side for the crown of the foam. */
+export const KNIFE_EDGE_CROWN = { share: 1 / 2, source: 'from memory' } as const satisfies {
+  share: number;
+  source: SettingSource;
+};
 
 /** The allowances a set of cushions is made with. */
 export type CushionSettings = Record<keyof typeof CUSHION_SETTINGS, CushionSetting>;

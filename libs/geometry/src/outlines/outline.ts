@@ -160,6 +160,12 @@ export function outlineArea(corners: readonly OutlineCorner[]): number {
   return chords + segments;
 }
 
+/** Width across the page and depth up the page of the corners of an outline. */
+export function outlineExtent(corners: readonly OutlineCorner[]): { widthMm: number; depthMm: number } {
+  const [xs, ys] = [corners.map(({ at }) => at[0]), corners.map(({ at }) => at[1])];
+  return { widthMm: Math.max(...xs) - Math.min(...xs), depthMm: Math.max(...ys) - Math.min(...ys) };
+}
+
 /**
  * An outline with an allowance all round it.
  *
@@ -167,7 +173,7 @@ export function outlineArea(corners: readonly OutlineCorner[]): number {
  *
  * @param corners - anticlockwise, without fault
  * @param byMm - how far outwards, negative inwards
- * @returns the corners moved; look at `outlineFault` again, since a notch may close
+ * @returns the corners moved; see `offsetFault`, since a notch may close up
  */
 export function offsetOutline(corners: readonly OutlineCorner[], byMm: number): OutlineCorner[] {
   return corners.map((corner, i) => {
@@ -183,6 +189,25 @@ export function offsetOutline(corners: readonly OutlineCorner[], byMm: number): 
     const grown = corner.radiusMm + (turn > 0 ? byMm : -byMm);
     return { ...corner, at, radiusMm: corner.radiusMm > 0 ? Math.max(0, grown) : 0 };
   });
+}
+
+/**
+ * What an allowance did to an outline that it must not do.
+ *
+ * @param plain - the outline
+ * @param grown - the same from `offsetOutline`
+ * @returns the first edge that closed up or the first fault of the grown outline; `undefined` when it can be cut
+ */
+export function offsetFault(
+  plain: readonly OutlineCorner[],
+  grown: readonly OutlineCorner[],
+): string | undefined {
+  for (const [i, { at, edge }] of plain.entries()) {
+    const next = (i + 1) % plain.length;
+    const [was, is] = [minus(plain[next]!.at, at), minus(grown[next]!.at, grown[i]!.at)];
+    if (was[0] * is[0] + was[1] * is[1] <= 0) return `the ${edge} edge is too narrow for its allowance`;
+  }
+  return outlineFault(grown);
 }
 
 /**

@@ -1,0 +1,61 @@
+import {
+  outlineStretches,
+  stretchLength,
+  type OutlineCorner,
+  type OutlineStretch,
+} from '../../outlines/outline.ts';
+
+/** How the strip round a plan divides into closure and boxing. */
+export interface EdgeStrip {
+  closure: { edgeMm: number; wrapMm: number; lengthMm: number };
+  /** Boxing, from one end of the closure anticlockwise round to the other. */
+  boxingMm: number;
+  /** Ends of straight stretches along the boxing, from its start: where it is sewn to a corner. */
+  marksMm: number[];
+}
+
+const isOf = (stretch: OutlineStretch, edge: string): boolean =>
+  stretch.kind === 'line' && stretch.edge === edge;
+
+/**
+ * Divides the way round a plan: the closure takes an edge and goes round both its ends, the boxing takes the rest.
+ *
+ * An edge that a notch interrupts is closed over the notch as well: from its first stretch to its last.
+ *
+ * @param corners - plan, seam to seam
+ * @param edge - with the closure
+ * @param wrapMm - wanted round each end; less where the closure would meet itself
+ * @returns lengths that together are the perimeter
+ */
+export function edgeStrip(corners: readonly OutlineCorner[], edge: string, wrapMm: number): EdgeStrip {
+  const stretches = outlineStretches(corners);
+  const lengths = stretches.map(stretchLength);
+  const perimeter = lengths.reduce((sum, length) => sum + length, 0);
+  const start = firstOf(stretches, edge);
+  const turned = [...stretches.slice(start), ...stretches.slice(0, start)];
+  const turnedLengths = [...lengths.slice(start), ...lengths.slice(0, start)];
+  const last = turned.findLastIndex((stretch) => isOf(stretch, edge));
+  const edgeMm = turnedLengths.slice(0, last + 1).reduce((sum, length) => sum + length, 0);
+  const wrap = Math.min(wrapMm, (perimeter - edgeMm) / 2);
+  const boxingMm = perimeter - edgeMm - 2 * wrap;
+  const marksMm: number[] = [];
+  let along = -wrap;
+  for (const length of turnedLengths.slice(last + 1)) {
+    if (along > 1e-6 && along < boxingMm - 1e-6) marksMm.push(along);
+    along += length;
+  }
+  return { closure: { edgeMm, wrapMm: wrap, lengthMm: edgeMm + 2 * wrap }, boxingMm, marksMm };
+}
+
+/** The stretch with which an edge begins, going anticlockwise; the first stretch where no edge has that name. */
+function firstOf(stretches: readonly OutlineStretch[], edge: string): number {
+  const count = stretches.length;
+  const gaps = stretches.map((stretch, i) => {
+    if (!isOf(stretch, edge)) return -1;
+    let gap = 0;
+    while (gap < count && !isOf(stretches[(i + count - 1 - gap) % count]!, edge)) gap += 1;
+    return gap;
+  });
+  const widest = Math.max(...gaps);
+  return Math.max(0, gaps.indexOf(widest));
+}
