@@ -58,6 +58,16 @@ const tableBase: fc.Arbitrary<PieceOf<'table'>['base']> = fc.oneof(
   }),
 );
 
+/** None, or leaves at ends or sides, up or hanging clear of the floor. */
+function leavesUnder(heightMm: number): fc.Arbitrary<Pick<PieceOf<'table'>, 'leaves'>> {
+  const leaf = fc.record({ widthMm: mm(50, Math.min(900, heightMm - 50)), down: fc.boolean() });
+  const pair = <K extends string>(one: K, other: K) =>
+    fc
+      .tuple(fc.option(leaf), fc.option(leaf))
+      .map(([a, b]) => ({ leaves: { ...(a && { [one]: a }), ...(b && { [other]: b }) } }));
+  return fc.oneof(fc.constant({}), pair('left', 'right'), pair('front', 'back'));
+}
+
 /** Tables of every base. */
 const anyTable: fc.Arbitrary<PieceOf<'table'>> = fc
   .record({
@@ -70,6 +80,7 @@ const anyTable: fc.Arbitrary<PieceOf<'table'>> = fc
     apron: fc.record({ heightMm: fc.oneof(fc.constant(0), mm(1, 200)), insetMm: mm(0, 150) }),
     base: tableBase,
   })
+  .chain((sizes) => leavesUnder(sizes.heightMm).map((leaves) => ({ ...sizes, ...leaves })))
   .map(({ at: where, ...sizes }) => ({ ...newPiece('table', 't1', 'T1', where), ...sizes }));
 
 const anySill: fc.Arbitrary<PieceOf<'sill'>> = fc

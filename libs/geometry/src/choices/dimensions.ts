@@ -5,7 +5,7 @@ import { DIMENSION_KINDS, type DimensionKind } from './dimension-kinds.ts';
 import { tableOverlaps } from './table-overlap.ts';
 
 /**
- * The numbers of a set that can be chosen: for all pieces that have one, and for each piece alone where there are
+ * The numbers of a set that can be chosen: for all pieces that have one and are not locked, and for each piece alone where there are
  * several.
  *
  * @param document - the set
@@ -13,7 +13,7 @@ import { tableOverlaps } from './table-overlap.ts';
  */
 export function dimensionsOf(document: SetDocument): Dimension[] {
   const found = DIMENSION_KINDS.flatMap((kind) => {
-    const pieces = document.pieces.filter((piece) => valueOf(piece, kind) !== undefined);
+    const pieces = document.pieces.filter((piece) => !piece.locked && valueOf(piece, kind) !== undefined);
     if (pieces.length === 0) return [];
     const together = dimension(document, kind, pieces, []);
     const alone = pieces.length > 1 ? pieces.map((piece) => dimension(document, kind, [piece], [])) : [];
@@ -46,12 +46,13 @@ export function dimensionIdOf(document: SetDocument, pieceId: string, key: strin
   const piece = document.pieces.find(({ id }) => id === pieceId);
   const kind = piece && DIMENSION_KINDS.find((one) => keyOf(piece, one) === key);
   if (!piece || !kind || valueOf(piece, kind) === undefined) return undefined;
-  const having = document.pieces.filter((one) => valueOf(one, kind) !== undefined);
+  if (piece.locked) return undefined;
+  const having = document.pieces.filter((one) => !one.locked && valueOf(one, kind) !== undefined);
   return having.length > 1 ? `${kind.id}|${pieceId}` : kind.id;
 }
 
 function withTables(document: SetDocument, kind: DimensionKind, seats: readonly Piece[]): Dimension[] {
-  const tables = document.pieces.filter((piece) => piece.kind === 'table');
+  const tables = document.pieces.filter((piece) => piece.kind === 'table' && !piece.locked);
   if (tables.length === 0) return [];
   return [{ ...dimension(document, kind, seats, tables), id: SEAT_AND_TABLES }];
 }
@@ -77,7 +78,8 @@ function dimension(
   ];
   const value = valueOf(lead, kind) as number;
   const all =
-    pieces.length > 1 || document.pieces.filter((one) => valueOf(one, kind) !== undefined).length === 1;
+    pieces.length > 1 ||
+    document.pieces.filter((one) => !one.locked && valueOf(one, kind) !== undefined).length === 1;
   return {
     id: all ? kind.id : `${kind.id}|${lead.id}`,
     label: kind.label,

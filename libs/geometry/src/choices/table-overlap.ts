@@ -16,7 +16,7 @@ const OVERLAP = 'table-overlap';
 export function tableOverlaps(document: SetDocument): Dimension[] {
   return document.pieces.flatMap((piece): Dimension[] => {
     const now = overlapOf(document, piece.id);
-    if (piece.kind !== 'table' || now === undefined || (!now.bothSides && piece.locked)) return [];
+    if (piece.kind !== 'table' || now === undefined || piece.locked) return [];
     return [
       {
         id: `${OVERLAP}|${piece.id}`,

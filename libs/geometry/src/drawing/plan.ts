@@ -2,6 +2,7 @@ import { cushionRuns, cushionRunsOf } from '../cushions/cushion-runs.ts';
 import { toRoom } from '../parts/placement.ts';
 import { benchLayout } from '../pieces/bench-layout.ts';
 import { placeFramesOf } from '../pieces/place-frames.ts';
+import { leavesOfTable, tableTop, type LeafEdge } from '../pieces/table-leaves.ts';
 import type { Piece, PieceOf, SetDocument } from '../room/document.ts';
 import { footprint } from '../room/footprint.ts';
 import { drawingOf, type Drawing, type DrawShape, type Fill, type PagePoint, type Pen } from './drawing.ts';
@@ -94,6 +95,24 @@ function sillShapes(sill: PieceOf<'sill'>): DrawShape[] {
   return shapes;
 }
 
+/** The top with its leaves; a hanging one is a thin strip at its edge. */
+function tableShapes(table: PieceOf<'table'>): DrawShape[] {
+  const leaves = leavesOfTable(table);
+  if (leaves.length === 0) return [area(table, corners(table), 'edge', 'walnut')];
+  const [x, z] = [table.lengthMm / 2, table.widthMm / 2];
+  const whole = tableTop(table);
+  const strips: Record<LeafEdge, [number, number, number, number]> = {
+    left: [whole.x0, -x, -z, z],
+    right: [x, whole.x1, -z, z],
+    back: [-x, x, whole.z0, -z],
+    front: [-x, x, z, whole.z1],
+  };
+  return [
+    area(table, rectangle(table, -x, x, -z, z), 'edge', 'walnut'),
+    ...leaves.map(({ edge }) => area(table, rectangle(table, ...strips[edge]), 'edge', 'walnut')),
+  ];
+}
+
 function pieceShapes(piece: Piece, marks: Map<string, string>): DrawShape[] {
   switch (piece.kind) {
     case 'bench':
@@ -103,7 +122,7 @@ function pieceShapes(piece: Piece, marks: Map<string, string>): DrawShape[] {
     case 'bulkhead':
       return [area(piece, corners(piece), 'cut', 'wall')];
     case 'table':
-      return [area(piece, corners(piece), 'edge', 'walnut')];
+      return tableShapes(piece);
     case 'overhead':
       return [area(piece, corners(piece), 'hair', 'none', true)];
     case 'loose-seat': {

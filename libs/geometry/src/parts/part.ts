@@ -15,6 +15,7 @@ export type PartRole =
   | 'end-wall'
   | 'arm'
   | 'top'
+  | 'leaf'
   | 'edge-lip'
   | 'apron'
   | 'leg'

@@ -54,7 +54,7 @@ export function parametersOf(piece: Piece): Parameter[] {
 }
 
 /**
- * Sets one parameter of one piece. A piece with one end at a wall grows away from it. Whoever sat at a place that is gone afterwards no longer sits.
+ * Sets one parameter of one piece; a locked piece takes none. A piece with one end at a wall grows away from it. Whoever sat at a place that is gone afterwards no longer sits.
  *
  * @param document - the set
  * @param pieceId - the piece to change
@@ -82,8 +82,8 @@ export function setParameter(
   if (refused !== undefined) {
     return fail({ key, label: now.label, value, min: now.min, max: now.max, message: refused });
   }
-  if (piece.locked && key.startsWith('at.')) {
-    const message = `${piece.mark} is locked where it stands; unlock it to move it.`;
+  if (piece.locked) {
+    const message = `${piece.mark} is locked; unlock it to change it.`;
     return fail({ key, label: now.label, value, min: now.min, max: now.max, message });
   }
   const exact = typeof value === 'number' ? Math.min(now.max, Math.max(now.min, value)) : value;

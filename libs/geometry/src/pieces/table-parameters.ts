@@ -1,5 +1,6 @@
 import type { PieceOf } from '../room/document.ts';
 import type { ParameterSpec } from './kind.ts';
+import { LEAF_OFF_FLOOR_MM, LEAF_PARAMETERS, widestLeafMm } from './table-leaves.ts';
 
 type Table = PieceOf<'table'>;
 type BaseKind = Table['base']['kind'];
@@ -45,6 +46,7 @@ export const TABLE_PARAMETERS: readonly ParameterSpec<'table'>[] = [
     kind: 'length',
     group: 'main',
     describes: 'floor to the top of the table',
+    limits: (table) => (table.leaves ? { min: widestLeafMm(table) + LEAF_OFF_FLOOR_MM } : {}),
   },
   {
     key: 'topThicknessMm',
@@ -140,4 +142,5 @@ export const TABLE_PARAMETERS: readonly ParameterSpec<'table'>[] = [
     { min: 10, max: 200 },
     { label: 'Foot height', describes: 'floor to the top of the foot' },
   ),
+  ...LEAF_PARAMETERS,
 ];

@@ -1,6 +1,7 @@
 import { partList, type PartList } from '../parts/part-list.ts';
 import type { MaterialKey, Part, PartRole } from '../parts/part.ts';
 import type { PieceOf } from '../room/document.ts';
+import { leavesOfTable, type LeafEdge } from './table-leaves.ts';
 
 type Table = PieceOf<'table'>;
 
@@ -8,7 +9,7 @@ const EDGE_MM = 18;
 const APRON_MM = 18;
 
 /**
- * Parts of a table: top, edge lip, apron and base.
+ * Parts of a table: top, leaves raised or hanging, edge lip where no leaf is hinged, apron and base.
  *
  * @param table - the table
  * @returns its parts, placed in the room
@@ -21,9 +22,18 @@ export function tableParts(table: Table): Part[] {
     centreMm: [0, table.heightMm - table.topThicknessMm / 2, 0],
     grain: 'x',
   });
+  leaves(list, table);
+  const hinged = leavesOfTable(table).map(({ edge }) => edge);
   const lip = table.edgeLipMm > 0 ? EDGE_MM : 0;
   if (lip > 0)
-    frame(list, 'edge-lip', 'walnut', table, { inset: 0, board: lip, drop: table.edgeLipMm, underside });
+    frame(
+      list,
+      'edge-lip',
+      'walnut',
+      table,
+      { inset: 0, board: lip, drop: table.edgeLipMm, underside },
+      hinged,
+    );
   const inset = Math.max(table.apron.insetMm, lip);
   const apron = hasApron(table, inset);
   if (apron) {
@@ -33,34 +43,64 @@ export function tableParts(table: Table): Part[] {
   return list.parts;
 }
 
+/** A raised leaf lies level with the top; a hanging one stands outside the edge it is hinged to. */
+function leaves(list: PartList, table: Table): void {
+  const thick = table.topThicknessMm;
+  for (const { edge, widthMm, down } of leavesOfTable(table)) {
+    const out = down ? thick : widthMm;
+    const high = down ? widthMm : thick;
+    const y = table.heightMm - high / 2;
+    const sign = edge === 'left' || edge === 'back' ? -1 : 1;
+    if (edge === 'left' || edge === 'right') {
+      const x = sign * (table.lengthMm / 2 + out / 2);
+      list.box('leaf', 'walnut', {
+        sizeMm: [out, high, table.widthMm],
+        centreMm: [x, y, 0],
+        grain: down ? 'z' : 'x',
+      });
+    } else {
+      const z = sign * (table.widthMm / 2 + out / 2);
+      list.box('leaf', 'walnut', { sizeMm: [table.lengthMm, high, out], centreMm: [0, y, z], grain: 'x' });
+    }
+  }
+}
+
 function hasApron(table: Table, insetMm: number): boolean {
   const narrow = Math.min(table.lengthMm, table.widthMm);
   return table.apron.heightMm > 0 && narrow > 2 * (insetMm + APRON_MM) + 10;
 }
 
-/** Four boards under the top, the long ones running through. */
+/** Boards under the edges of the top, the long ones running through. */
 function frame(
   list: PartList,
   role: PartRole,
   material: MaterialKey,
   table: Table,
   { inset, board, drop, underside }: { inset: number; board: number; drop: number; underside: number },
+  without: readonly LeafEdge[] = [],
 ): void {
   const height = Math.min(drop, underside);
   const y = underside - height / 2;
   const long = table.lengthMm - 2 * inset;
   const short = table.widthMm - 2 * inset - 2 * board;
-  for (const sign of [-1, 1]) {
-    list.box(role, material, {
-      sizeMm: [long, height, board],
-      centreMm: [0, y, sign * (table.widthMm / 2 - inset - board / 2)],
-      grain: 'x',
-    });
-    list.box(role, material, {
-      sizeMm: [board, height, short],
-      centreMm: [sign * (table.lengthMm / 2 - inset - board / 2), y, 0],
-      grain: 'z',
-    });
+  for (const [sign, along, across] of [
+    [-1, 'back', 'left'],
+    [1, 'front', 'right'],
+  ] as const) {
+    if (!without.includes(along)) {
+      list.box(role, material, {
+        sizeMm: [long, height, board],
+        centreMm: [0, y, sign * (table.widthMm / 2 - inset - board / 2)],
+        grain: 'x',
+      });
+    }
+    if (!without.includes(across)) {
+      list.box(role, material, {
+        sizeMm: [board, height, short],
+        centreMm: [sign * (table.lengthMm / 2 - inset - board / 2), y, 0],
+        grain: 'z',
+      });
+    }
   }
 }
 
@@ -123,6 +163,12 @@ function columns(
   const radius = Math.min(kind.diameterMm / 2, roomZ, kind.count === 1 ? roomX : roomX / 2);
   const footHeight = Math.min(kind.footHeightMm, underside / 2);
   const apart = Math.min(table.lengthMm / 4, roomX - radius);
+  // A leaf that hangs down to the feet keeps them in.
+  const low = leavesOfTable(table).some(
+    ({ edge, down, widthMm }) =>
+      down && (edge === 'front' || edge === 'back') && table.heightMm - widthMm < footHeight,
+  );
+  const footLength = low ? Math.min(kind.footLengthMm, table.widthMm) : kind.footLengthMm;
   for (const x of kind.count === 1 ? [0] : [-apart, apart]) {
     list.cylinder('column', 'walnut', {
       xMm: x,
@@ -132,7 +178,7 @@ function columns(
       topMm: underside,
     });
     list.box('foot', 'walnut', {
-      sizeMm: [radius * 1.6, footHeight, kind.footLengthMm],
+      sizeMm: [radius * 1.6, footHeight, footLength],
       centreMm: [x, footHeight / 2, 0],
       grain: 'z',
     });

@@ -1,5 +1,6 @@
 import type { PieceOf } from '../room/document.ts';
 import { sentenceOf, type Envelope, type PieceDefinition, type SpecSentence } from './kind.ts';
+import { LEAF_WORDS, leavesOfTable, tableTop } from './table-leaves.ts';
 import { TABLE_PARAMETERS } from './table-parameters.ts';
 import { tableParts } from './table-parts.ts';
 
@@ -28,8 +29,8 @@ export const TABLE: PieceDefinition<'table'> = {
 function envelope(table: PieceOf<'table'>): Envelope {
   const { base } = table;
   const foot = base.kind === 'columns' ? base.footLengthMm / 2 : 0;
-  const half = { x: table.lengthMm / 2, z: Math.max(table.widthMm / 2, foot) };
-  return { minMm: [-half.x, 0, -half.z], maxMm: [half.x, table.heightMm, half.z] };
+  const { x0, x1, z0, z1 } = tableTop(table);
+  return { minMm: [x0, 0, Math.min(z0, -foot)], maxMm: [x1, table.heightMm, Math.max(z1, foot)] };
 }
 
 function sentence(table: PieceOf<'table'>): SpecSentence {
@@ -62,6 +63,36 @@ function sentence(table: PieceOf<'table'>): SpecSentence {
             '.',
           ] as const)
         : (['no apron.'] as const)),
+      ...leafRuns(table),
     ),
   };
+}
+
+type Run = Parameters<typeof sentenceOf>[number];
+
+/** " Left leaf 10″ wide, up; right leaf 10″ wide, hanging; making 4′ 10″ in all." */
+function leafRuns(table: PieceOf<'table'>): Run[] {
+  const leaves = leavesOfTable(table);
+  if (leaves.length === 0) return [];
+  const { x0, x1, z0, z1 } = tableTop(table);
+  const atEnds = leaves.some(({ edge }) => edge === 'left' || edge === 'right');
+  return [
+    ...leaves.flatMap(({ edge, down }, n): Run[] => {
+      const words = LEAF_WORDS[edge];
+      const name = n === 0 ? words.replace(/^./, (letter) => letter.toUpperCase()) : words;
+      return [
+        ` ${name} `,
+        [`leaves.${edge}.widthMm`, `${words.replace(/^./, (letter) => letter.toUpperCase())} width`],
+        ` wide, ${down ? 'hanging' : 'up'};`,
+      ];
+    }),
+    ' ',
+    {
+      kind: 'derived',
+      key: 'leaves',
+      text: `making ${atEnds ? 'long' : 'wide'} in all as they are`,
+      valueMm: atEnds ? x1 - x0 : z1 - z0,
+    },
+    '.',
+  ];
 }

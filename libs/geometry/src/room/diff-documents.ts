@@ -6,7 +6,7 @@ import { isSame, leavesOf } from './leaves.ts';
 export interface DocumentDifference {
   /** Stable while the three versions stay the same. */
   id: string;
-  kind: 'parameter' | 'piece' | 'seating' | 'asked' | 'known-difference';
+  kind: 'parameter' | 'piece' | 'seating' | 'asked' | 'known-difference' | 'group';
   pieceId?: string;
   mark?: string;
   /** Path of the parameter in its piece. */
@@ -27,6 +27,8 @@ const LABELS: Record<string, string> = {
   note: 'Note',
   accessible: 'Accessible',
   locked: 'Locked',
+  hidden: 'Hidden',
+  leaves: 'Leaves',
   places: 'Places',
   base: 'Base',
   'seatCushion.foam': 'Seat foam',
@@ -40,6 +42,7 @@ const ASKED_LABELS: Record<string, string> = {
   trafficBehind: 'Who passes behind seats',
   lensHeightMm: 'Height of the lens',
   appleBoxes: 'Apple boxes at hand',
+  entrance: 'Where people come in',
   route: 'Route kept clear',
   turningAt: 'Spot for turning round',
   door: 'Door on the way in',
@@ -64,6 +67,7 @@ export function diffDocuments(
     ...seatingDifferences(base, mine, theirs),
     ...askedDifferences(base, mine, theirs),
     ...noteDifferences(base, mine, theirs),
+    ...groupDifferences(base, mine, theirs),
   ];
 }
 
@@ -211,4 +215,23 @@ function noteDifferences(
       base !== null,
     ),
   );
+}
+
+function groupDifferences(
+  base: SetDocument | null,
+  mine: SetDocument,
+  theirs: SetDocument,
+): DocumentDifference[] {
+  const find = (document: SetDocument | null, id: string) =>
+    document?.groups?.find((group) => group.id === id);
+  const ids = new Set([theirs, mine].flatMap(({ groups = [] }) => groups.map(({ id }) => id)));
+  return [...ids].flatMap((id) => {
+    const values = { base: find(base, id), mine: find(mine, id), theirs: find(theirs, id) };
+    const name = (values.mine ?? values.theirs)?.name ?? id;
+    return compared(
+      { id: `group:${id}`, kind: 'group', key: id, label: `Group “${name}”` },
+      values,
+      base !== null,
+    );
+  });
 }

@@ -31,7 +31,10 @@ const common = {
   /** Place of the piece's own origin on the floor and its turn about the vertical, anticlockwise from above. */
   at: z.strictObject({ xMm: length(-50000, 50000), zMm: length(-50000, 50000), turnDeg: length(-360, 360) }),
   accessible: z.boolean(),
+  /** Not moved, turned, shaped or taken out until it is unlocked. */
   locked: z.boolean(),
+  /** Left out of the drawing on the screen; measured all the same. */
+  hidden: z.boolean().optional(),
   note: text(2000),
 };
 
@@ -106,7 +109,10 @@ const tableBase = z.discriminatedUnion('kind', [
   }),
 ]);
 
-/** Table. Origin: middle of the top, at the floor; length along x, width along z. */
+/** A leaf hinged to an edge of a table's top: its width, and whether it hangs. */
+const tableLeaf = z.strictObject({ widthMm: length(50, 900), down: z.boolean() });
+
+/** Table. Origin: middle of the fixed top, at the floor; length along x, width along z. */
 const table = z.strictObject({
   kind: z.literal('table'),
   ...common,
@@ -119,6 +125,15 @@ const table = z.strictObject({
   edgeLipMm: length(0, 150),
   apron: z.strictObject({ heightMm: length(0, 300), insetMm: length(0, 500) }),
   base: tableBase,
+  /** Leaves at both ends or along both sides, or at one of them; left as seen from in front. Absent: none. */
+  leaves: z
+    .strictObject({
+      left: tableLeaf.optional(),
+      right: tableLeaf.optional(),
+      front: tableLeaf.optional(),
+      back: tableLeaf.optional(),
+    })
+    .optional(),
 });
 
 /** Window sill. Origin: middle of its rear edge at the floor; it stands out along +z. */
@@ -195,6 +210,8 @@ export const setDocumentSchema = z.strictObject({
     lensHeightMm: length(0, 4000).optional(),
     /** Apple boxes at hand (HEAD-04). */
     appleBoxes: z.strictObject({ full: boxes, half: boxes, quarter: boxes, pancake: boxes }).optional(),
+    /** Where people come in, when that is not the start of the route. */
+    entrance: spot.optional(),
     /** Corners of the route that is kept clear, from its start to its end (EGRESS-03). */
     route: z.array(spot).min(2).max(40).optional(),
     /** Middle of the floor that is kept clear for turning round (ACC-08). */
@@ -216,12 +233,24 @@ export const setDocumentSchema = z.strictObject({
       }),
     )
     .max(200),
+  /** Pieces that are chosen by one press and handled together. */
+  groups: z
+    .array(
+      z.strictObject({
+        id: z.string().min(1).max(40),
+        name: text(80).min(1),
+        pieceIds: z.array(z.string().max(40)).min(1).max(MAX_PIECES),
+      }),
+    )
+    .max(100)
+    .optional(),
 });
 
 export type SetDocument = z.infer<typeof setDocumentSchema>;
 export type Piece = z.infer<typeof pieceSchema>;
 export type PieceKind = Piece['kind'];
 export type PieceOf<K extends PieceKind> = Extract<Piece, { kind: K }>;
+export type PieceGroup = NonNullable<SetDocument['groups']>[number];
 export type SitterRef = z.infer<typeof sitterRef>;
 export type Foam = z.infer<typeof foam>;
 export type BoardModule = z.infer<typeof boardModule>;

@@ -2,6 +2,7 @@ import { definitionOf, kindTitle } from '../pieces/kinds.ts';
 import { normalTurnDeg, toRoom } from '../parts/placement.ts';
 import { footprint } from './footprint.ts';
 import type { Piece, PieceKind, SetDocument } from './document.ts';
+import { withoutLostMembers } from './groups.ts';
 import { withoutLostSeats } from './seating.ts';
 
 const DUPLICATE_GAP_MM = 50;
@@ -70,15 +71,16 @@ export function addPiece(
 }
 
 /**
- * Takes a piece out, and whoever sat on it.
+ * Takes a piece out, and whoever sat on it. A locked piece stays.
  *
  * @param document - the set
  * @param pieceId - the piece; an unknown id changes nothing
  * @returns the new set
  */
 export function removePiece(document: SetDocument, pieceId: string): SetDocument {
-  const pieces = document.pieces.filter((piece) => piece.id !== pieceId);
-  return pieces.length === document.pieces.length ? document : withoutLostSeats({ ...document, pieces });
+  const pieces = document.pieces.filter((piece) => piece.id !== pieceId || piece.locked);
+  if (pieces.length === document.pieces.length) return document;
+  return withoutLostMembers(withoutLostSeats({ ...document, pieces }));
 }
 
 /**
@@ -100,7 +102,7 @@ export function duplicatePiece(
   const copyId = id ?? freeId(document, mark);
   const { x0, x1 } = footprint(piece);
   const [xMm, , zMm] = toRoom(piece.at, [x1 - x0 + DUPLICATE_GAP_MM, 0, 0]);
-  const copy = { ...piece, id: copyId, mark, locked: false, at: { ...piece.at, xMm, zMm } };
+  const copy = { ...shownPiece(piece), id: copyId, mark, locked: false, at: { ...piece.at, xMm, zMm } };
   return {
     document: withoutLostSeats({ ...document, pieces: [...document.pieces, copy] }),
     pieceId: copyId,
@@ -137,6 +139,17 @@ export function freeId(document: SetDocument, mark: string): string {
   let id = base;
   for (let n = 2; taken.has(id); n += 1) id = `${base}-${n}`;
   return id;
+}
+
+/**
+ * A piece that is drawn.
+ *
+ * @param piece - any piece
+ * @returns the piece without the mark that hides it
+ */
+export function shownPiece<P extends Piece>(piece: P): P {
+  const { hidden: _, ...shown } = piece;
+  return shown as P;
 }
 
 /** To the right of everything that is already there. */

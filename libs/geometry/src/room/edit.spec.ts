@@ -265,11 +265,11 @@ describe('parameters', () => {
     expect(free.ok && pieceOf(free.value, 'b1').at).toEqual(pieceOf(bayOf(), 'b1').at);
   });
 
-  it('do not move a locked piece', () => {
+  it('do not move or shape a locked piece', () => {
     const document = bayOf();
     const locked = { ...document, pieces: document.pieces.map((piece) => ({ ...piece, locked: true })) };
     expect(setParameter(locked, 't1', 'at.xMm', 5)).toMatchObject({ ok: false, error: { key: 'at.xMm' } });
-    expect(setParameter(locked, 't1', 'heightMm', 750).ok).toBe(true);
+    expect(setParameter(locked, 't1', 'heightMm', 750).ok).toBe(false);
   });
 
   it('unseat whoever sat at a place that is gone', () => {

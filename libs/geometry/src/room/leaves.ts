@@ -1,5 +1,5 @@
 /** Values that only make sense together and are chosen as one. */
-const WHOLE = new Set(['at', 'places', 'base', 'foam', 'buttons', 'lumbar']);
+const WHOLE = new Set(['at', 'places', 'base', 'foam', 'buttons', 'lumbar', 'leaves']);
 
 /**
  * The single values of a piece, by path; a position, a base, a foam and the like count as one value.
@@ -35,7 +35,7 @@ export function isSame(one: unknown, other: unknown): boolean {
 }
 
 /**
- * A copy of a holder with the value at a path replaced.
+ * A copy of a holder with the value at a path replaced; a value that is absent takes its key away.
  *
  * @param holder - plain JSON object
  * @param path - keys parted by dots; every key before the last must exist
@@ -45,5 +45,9 @@ export function isSame(one: unknown, other: unknown): boolean {
 export function withPath<T>(holder: T, path: string, value: unknown): T {
   const [key = '', ...rest] = path.split('.');
   const inner = (holder as Record<string, unknown>)[key];
+  if (rest.length === 0 && value === undefined) {
+    const { [key]: _, ...others } = holder as Record<string, unknown>;
+    return others as T;
+  }
   return { ...holder, [key]: rest.length === 0 ? value : withPath(inner, rest.join('.'), value) };
 }

@@ -1,7 +1,8 @@
 import { fail, ok, type Result } from '../units/result.ts';
 import { diffDocuments, type DocumentDifference } from './diff-documents.ts';
-import type { Piece, SetDocument, SitterRef } from './document.ts';
+import type { Piece, PieceGroup, SetDocument, SitterRef } from './document.ts';
 import { freeId, nextMark } from './edit-pieces.ts';
+import { withoutLostMembers } from './groups.ts';
 import { withPath } from './leaves.ts';
 import { readSetDocument, type DocumentFieldError } from './read-document.ts';
 import type { PostureChoice } from './posture-choice.ts';
@@ -95,7 +96,20 @@ function withMine(merged: SetDocument, difference: DocumentDifference): SetDocum
       const written = mine as SetDocument['knownDifferences'][number] | undefined;
       return { ...merged, knownDifferences: written === undefined ? others : [...others, written] };
     }
+    case 'group':
+      return withMyGroup(merged, key, mine as PieceGroup | undefined);
   }
+}
+
+/** Two groups made on both sides under one id are one group here, whichever was chosen. */
+function withMyGroup(
+  { groups, ...merged }: SetDocument,
+  id: string,
+  mine: PieceGroup | undefined,
+): SetDocument {
+  const others = groups?.filter((group) => group.id !== id) ?? [];
+  const all = mine === undefined ? others : [...others, mine];
+  return all.length === 0 ? merged : { ...merged, groups: all };
 }
 
 /** Whoever sits there now; how they sit stays unless that differs as well. */
@@ -155,6 +169,6 @@ function withEveryoneOnce(merged: SetDocument, mine: SetDocument): Pick<Merge, '
     seen.add(sitter.castId);
     return !again;
   });
-  const document = withoutLostSeats({ ...merged, seating: once });
+  const document = withoutLostMembers(withoutLostSeats({ ...merged, seating: once }));
   return { document, unseated: merged.seating.filter((seat) => !document.seating.includes(seat)) };
 }

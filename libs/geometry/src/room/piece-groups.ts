@@ -2,6 +2,7 @@ import { normalTurnDeg, toRoom } from '../parts/placement.ts';
 import type { Piece, SetDocument } from './document.ts';
 import { duplicatePiece, movePiece } from './edit-pieces.ts';
 import { footprint } from './footprint.ts';
+import { withoutLostMembers } from './groups.ts';
 import { namedPieces } from './named-pieces.ts';
 import { withoutLostSeats } from './seating.ts';
 
@@ -55,15 +56,16 @@ export function turnPieces(document: SetDocument, pieceIds: readonly string[], b
 }
 
 /**
- * Takes several pieces out, and whoever sat on them.
+ * Takes several pieces out, and whoever sat on them. Locked pieces stay.
  *
  * @param document - the set
  * @param pieceIds - unknown ids are passed over
  * @returns the new set
  */
 export function removePieces(document: SetDocument, pieceIds: readonly string[]): SetDocument {
-  const pieces = document.pieces.filter((piece) => !pieceIds.includes(piece.id));
-  return pieces.length === document.pieces.length ? document : withoutLostSeats({ ...document, pieces });
+  const pieces = document.pieces.filter((piece) => piece.locked || !pieceIds.includes(piece.id));
+  if (pieces.length === document.pieces.length) return document;
+  return withoutLostMembers(withoutLostSeats({ ...document, pieces }));
 }
 
 /**

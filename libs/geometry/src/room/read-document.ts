@@ -1,5 +1,6 @@
 import { fail, ok, type Result } from '../units/result.ts';
 import { SCHEMA_VERSION, setDocumentSchema, type SetDocument } from './document.ts';
+import { leafFault } from '../pieces/table-leaves.ts';
 import { placeExists } from './seating.ts';
 import { upgraded } from './upgrades.ts';
 
@@ -104,6 +105,17 @@ function meaningErrors(document: SetDocument): DocumentFieldError[] {
   document.knownDifferences.forEach(({ id }, i) =>
     unique(known, id, `knownDifferences.${i}.id`, `Two known differences have the id “${id}”`),
   );
+  const groups = new Set<string>();
+  document.groups?.forEach(({ id, name, pieceIds }, i) => {
+    unique(groups, id, `groups.${i}.id`, `Two groups have the id “${id}”`);
+    const lost = pieceIds.find((pieceId) => !ids.has(pieceId));
+    if (lost !== undefined) {
+      const message = `The group “${name}” holds a piece “${lost}” that is not in the set`;
+      errors.push({ path: `groups.${i}.pieceIds`, code: 'no-such-piece', message });
+    }
+  });
+  const views = new Set<string>();
+  document.views?.forEach(({ id }, i) => unique(views, id, `views.${i}.id`, `Two views have the id “${id}”`));
   if (errors.length > 0) return errors;
   document.seating.forEach((seat, i) => {
     const where = `${seat.pieceId}:${seat.place}`;
@@ -120,6 +132,10 @@ function meaningErrors(document: SetDocument): DocumentFieldError[] {
 }
 
 function pieceErrors(piece: SetDocument['pieces'][number], path: string): DocumentFieldError[] {
+  if (piece.kind === 'table') {
+    const message = leafFault(piece);
+    return message === undefined ? [] : [{ path: `${path}.leaves`, code: 'too_big', message }];
+  }
   if (piece.kind !== 'bench') return [];
   const inner = piece.lengthMm - piece.ends.left.thicknessMm - piece.ends.right.thicknessMm;
   if (inner >= 200) return [];

@@ -138,7 +138,7 @@ export function leversFor(document: SetDocument, cell: FitCell, stepMm: number):
   const pieces = piecesOf(document, cell);
   return moves.flatMap(([kind, key]) =>
     pieces
-      .filter((piece) => piece.kind === kind && !(piece.locked && (key === 'overlap' || key === 'gap')))
+      .filter((piece) => piece.kind === kind && !piece.locked)
       .flatMap((piece) => leverOf(document, cell, piece, key, stepMm) ?? []),
   );
 }
@@ -230,8 +230,8 @@ function gapLever(document: SetDocument, cell: FitCell, bench: Piece, named: Nam
 
 /** Raises or lowers all benches, and the tables with them. */
 function togetherLever(document: SetDocument, bench: Piece, named: Named): Lever | undefined {
-  const seats = document.pieces.filter(({ kind }) => kind === 'bench');
-  const tables = document.pieces.filter(({ kind }) => kind === 'table');
+  const seats = document.pieces.filter(({ kind, locked }) => kind === 'bench' && !locked);
+  const tables = document.pieces.filter(({ kind, locked }) => kind === 'table' && !locked);
   const from = heightOf(bench);
   if (from === undefined || tables.length + seats.length < 2) return undefined;
   return {

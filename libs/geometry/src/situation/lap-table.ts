@@ -1,4 +1,5 @@
 import type { PlaceTableSituation } from '@settlewright/anthropometry';
+import { tableTop } from '../pieces/table-leaves.ts';
 import type { PieceKind, PieceOf } from '../room/document.ts';
 import { area, clipped, extent, inFrame, type PlanSolid } from './plan.ts';
 import { rectangleOf, solidsNear, type Survey, type SurveyedPlace } from './survey.ts';
@@ -38,9 +39,10 @@ export function lapTable(found: Survey, place: SurveyedPlace): PlaceTableSituati
   return best === undefined ? undefined : measured(found, place, best.table);
 }
 
-function topOf(table: PieceOf<'table'>) {
-  const [x, z] = [table.lengthMm / 2, table.widthMm / 2];
-  return rectangleOf(table, [-x, x], [-z, z]);
+/** Outline of the top in the room, raised leaves with it. */
+export function topOf(table: PieceOf<'table'>) {
+  const { x0, x1, z0, z1 } = tableTop(table);
+  return rectangleOf(table, [x0, x1], [z0, z1]);
 }
 
 function measured(found: Survey, place: SurveyedPlace, table: PieceOf<'table'>): PlaceTableSituation {
@@ -55,7 +57,7 @@ function measured(found: Survey, place: SurveyedPlace, table: PieceOf<'table'>):
     (solid) => solid.bottomMm < table.heightMm,
   );
   const hanging = near.filter(
-    (solid) => solid.pieceId === table.id && ['top', 'edge-lip', 'apron'].includes(solid.role),
+    (solid) => solid.pieceId === table.id && ['top', 'leaf', 'edge-lip', 'apron'].includes(solid.role),
   );
   const over = hanging.filter((solid) => area(clipped(solid.outline, lap)) > 0);
   const undersideMm = Math.min(table.heightMm - table.topThicknessMm, ...over.map((solid) => solid.bottomMm));

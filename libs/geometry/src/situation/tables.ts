@@ -1,5 +1,7 @@
 import type { PlaceSituation, TableSituation } from '@settlewright/anthropometry';
 import { union, without, type Interval } from '../drawing/intervals.ts';
+import { toRoom } from '../parts/placement.ts';
+import { tableTop } from '../pieces/table-leaves.ts';
 import type { PieceOf } from '../room/document.ts';
 import type { Limits } from './limits.ts';
 import { clipped, extent, inFrame, type PlanFrame, type PlanSolid } from './plan.ts';
@@ -8,7 +10,7 @@ import { planOfPiece, solidsNear, type Survey, type SurveyedPlace } from './surv
 type Table = PieceOf<'table'>;
 type EdgeName = TableSituation['edges'][number]['name'];
 
-const HANGING = ['top', 'edge-lip', 'apron'];
+const HANGING = ['top', 'leaf', 'edge-lip', 'apron'];
 const FRONT: { name: EdgeName; turnRad: number } = { name: 'front', turnRad: 0 };
 const EDGES: readonly (typeof FRONT)[] = [
   FRONT,
@@ -99,8 +101,9 @@ function dinersAt(
 /** Width of the top between diners who face each other across it. */
 function betweenFacing(table: Table, isTaken: (name: EdgeName) => boolean): { betweenFacingMm?: number } {
   const widths: number[] = [];
-  if (isTaken('front') && isTaken('back')) widths.push(table.widthMm);
-  if (isTaken('left') && isTaken('right')) widths.push(table.lengthMm);
+  const { x0, x1, z0, z1 } = tableTop(table);
+  if (isTaken('front') && isTaken('back')) widths.push(z1 - z0);
+  if (isTaken('left') && isTaken('right')) widths.push(x1 - x0);
   return widths.length > 0 ? { betweenFacingMm: Math.min(...widths) } : {};
 }
 
@@ -117,17 +120,15 @@ const edgeOf = (table: Table, { name, turnRad }: typeof FRONT): Edge => ({
  * @returns its length, and the level frame at its middle that looks in under the top
  */
 export function edgeAt(table: Table, turnRad: number): { lengthMm: number; plan: PlanFrame } {
-  const { xMm, zMm, facingRad } = planOfPiece(table);
-  const outward = facingRad + turnRad;
+  const outward = planOfPiece(table).facingRad + turnRad;
+  const { x0, x1, z0, z1 } = tableTop(table);
   const isLong = Math.abs(Math.cos(turnRad)) > Math.SQRT1_2;
-  const toEdge = (isLong ? table.widthMm : table.lengthMm) / 2;
+  const x = isLong ? (x0 + x1) / 2 : Math.sin(turnRad) > 0 ? x1 : x0;
+  const z = isLong ? (Math.cos(turnRad) > 0 ? z1 : z0) : (z0 + z1) / 2;
+  const [xMm, , zMm] = toRoom(table.at, [x, 0, z]);
   return {
-    lengthMm: isLong ? table.lengthMm : table.widthMm,
-    plan: {
-      xMm: xMm + Math.sin(outward) * toEdge,
-      zMm: zMm + Math.cos(outward) * toEdge,
-      facingRad: outward + Math.PI,
-    },
+    lengthMm: isLong ? x1 - x0 : z1 - z0,
+    plan: { xMm, zMm, facingRad: outward + Math.PI },
   };
 }
 

@@ -1,9 +1,10 @@
 import type { PlaceSituation, WaySituation } from '@settlewright/anthropometry';
 import { benchLayout } from '../pieces/bench-layout.ts';
 import type { PieceOf } from '../room/document.ts';
+import { topOf } from './lap-table.ts';
 import type { Limits } from './limits.ts';
 import { clipped, extent, inFrame } from './plan.ts';
-import { planOfPiece, rectangleOf, solidsNear, type Survey, type SurveyedPlace } from './survey.ts';
+import { planOfPiece, solidsNear, type Survey, type SurveyedPlace } from './survey.ts';
 
 type Bench = PieceOf<'bench'>;
 type Table = PieceOf<'table'>;
@@ -56,8 +57,7 @@ function tablesAlong(
   return found.document.pieces
     .filter((piece): piece is Table => piece.kind === 'table')
     .flatMap((table) => {
-      const [x, z] = [table.lengthMm / 2, table.widthMm / 2];
-      const top = inFrame(rectangleOf(table, [-x, x], [-z, z]), planOfPiece(bench));
+      const top = inFrame(topOf(table), planOfPiece(bench));
       const near = clipped(top, {
         left: [-half, half],
         ahead: [front + servesMm[0], front + servesMm[1]],
@@ -116,8 +116,7 @@ function chairsBothSides(found: Survey, places: PlaceSituation[], { opposedRad }
     const half = place.frame.widthMm / 2;
     for (const other of seats) {
       if (other.table.id === table.id || !isBackToBack(place, other.place, opposedRad)) continue;
-      const [x, z] = [other.table.lengthMm / 2, other.table.widthMm / 2];
-      const top = inFrame(rectangleOf(other.table, [-x, x], [-z, z]), place.plan);
+      const top = inFrame(topOf(other.table), place.plan);
       const behind = clipped(top, { left: [-half, half], ahead: [-WIDEST_WAY_MM, -place.effectiveDepthMm] });
       if (behind.length === 0) continue;
       const pair = [table, other.table].sort((a, b) => (a.id < b.id ? -1 : 1));
