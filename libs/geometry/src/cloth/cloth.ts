@@ -15,7 +15,7 @@ export interface ClothPanel {
   lengthMm: number;
   /** Whether its up points up the roll, across it (railroaded), or either way. */
   lies: 'up-roll' | 'railroad' | 'either';
-  /** Point that has to fall on the start of a repeat, from the lower left corner of the panel as it lies. */
+  /** Point that has to fall on the start of a repeat, from its own lower left corner: across it, and up it. */
   controlMm?: { acrossMm: number; alongMm: number };
 }
 
@@ -46,6 +46,8 @@ export interface PanelWay {
   widthMm: number;
   lengthMm: number;
   railroaded: boolean;
+  /** The panel's control point as it lies. */
+  controlMm?: { acrossMm: number; alongMm: number };
 }
 
 /**
@@ -56,11 +58,16 @@ export interface PanelWay {
  * @returns one or two ways, none when the panel fits the roll in no way that is allowed
  */
 export function waysOf(panel: ClothPanel, usableWidthMm: number): PanelWay[] {
-  const { widthMm, lengthMm, lies } = panel;
-  const up: PanelWay = { widthMm, lengthMm, railroaded: false };
-  const across: PanelWay = { widthMm: lengthMm, lengthMm: widthMm, railroaded: true };
+  const { widthMm, lengthMm, lies, controlMm } = panel;
+  const up: PanelWay = { widthMm, lengthMm, railroaded: false, ...(controlMm && { controlMm }) };
+  const across: PanelWay = {
+    widthMm: lengthMm,
+    lengthMm: widthMm,
+    railroaded: true,
+    ...(controlMm && { controlMm: { acrossMm: controlMm.alongMm, alongMm: controlMm.acrossMm } }),
+  };
   const ways = lies === 'up-roll' ? [up] : lies === 'railroad' ? [across] : [up, across];
   const fitting = ways.filter((way) => way.widthMm <= usableWidthMm + 1e-6);
-  // A square needs no second try.
-  return fitting.length === 2 && Math.abs(widthMm - lengthMm) < 1e-6 ? [up] : fitting;
+  // A plain square needs no second try.
+  return fitting.length === 2 && !controlMm && Math.abs(widthMm - lengthMm) < 1e-6 ? [up] : fitting;
 }

@@ -69,10 +69,10 @@ export function layInOrder(
         const score = scoreOf(way, ledge.widthMm, [leftWallMm, rightWallMm]);
         if (best && score <= best.score) continue;
         // Of panels alike only the first is tried on a ledge.
-        const likeness = `${way.widthMm}/${way.lengthMm}/${panel.controlMm ? panel.id : ''}`;
+        const likeness = `${way.widthMm}/${way.lengthMm}/${way.controlMm ? panel.id : ''}`;
         if (seen.has(likeness)) continue;
         seen.add(likeness);
-        const spot = skyline.landing(ledge, way.widthMm, panel.controlMm, atRight);
+        const spot = skyline.landing(ledge, way.widthMm, way.controlMm, atRight);
         if (spot) best = { at, way, spot, score };
       }
     }
@@ -84,7 +84,8 @@ export function layInOrder(
     const [taken] = left.splice(at, 1);
     const topMm = spot.yMm + way.lengthMm;
     skyline.lay(index, spot.xMm, topMm, way.widthMm);
-    placed.push({ id: taken!.panel.id, ...spot, ...way });
+    const { controlMm: _, ...size } = way;
+    placed.push({ id: taken!.panel.id, ...spot, ...size });
     lengthMm = Math.max(lengthMm, topMm);
   }
   return { placed, lengthMm };

@@ -1,0 +1,133 @@
+import { CUSHION_SETTINGS, type CushionSettings } from '../cushions/cushion-settings.ts';
+import { biasStripLength, weltStrips } from '../cushions/cushion-sizes.ts';
+import type { CushionMake } from '../cushions/making/cushion-make.ts';
+import type { CushionPanels } from '../cushions/making/cut-panels.ts';
+import { outlineExtent } from '../outlines/outline.ts';
+import type { ClothPanel } from './cloth.ts';
+
+/** A cloth as it is bought. */
+export interface CoverCloth {
+  /** Full width. */
+  widthMm: number;
+  /** Lost at each edge of the roll to selvedge. */
+  selvedgeMm: number;
+  /** How its own up lies on a cushion; either where pattern and nap do not show it. */
+  lies: 'up-roll' | 'railroad' | 'either';
+  repeatMm: { acrossMm: number; alongMm: number };
+}
+
+/** A cushion whose panels are cut from a cloth. */
+export interface CoveredCushion {
+  mark: string;
+  make: CushionMake;
+  made: CushionPanels;
+}
+
+/** Panels whose pattern is placed: the faces that are looked at. */
+const FACES: ReadonlySet<string> = new Set(['plate', 'cover', 'top, front and bottom']);
+
+/** Width that panels may take up. */
+export const usableWidthMm = ({ widthMm, selvedgeMm }: CoverCloth): number => widthMm - 2 * selvedgeMm;
+
+/**
+ * Every panel of some cushions for one cloth, ready to be laid.
+ *
+ * Strips longer than the roll is wide are pieced with a seam where the cloth forbids to lay them along it. Welt is cut
+ * straight across the roll in one block, or on the bias from squares.
+ *
+ * @param cushions - those with this cover
+ * @param cloth - the roll
+ * @param settings - allowances of the workshop
+ * @returns panels named by mark and panel
+ */
+export function coverPanels(
+  cushions: readonly CoveredCushion[],
+  cloth: CoverCloth,
+  settings: CushionSettings = CUSHION_SETTINGS,
+): ClothPanel[] {
+  const usable = usableWidthMm(cloth);
+  const panels = cushions.flatMap(({ mark, made }) =>
+    made.panels.flatMap(({ name, count, cut }) => {
+      const { widthMm, depthMm } = outlineExtent(cut);
+      const isFace = FACES.has(name);
+      return Array.from({ length: count }, (_, n) => {
+        const id = count === 1 ? `${mark} ${name}` : `${mark} ${name} ${n + 1}`;
+        return isFace
+          ? [face(id, widthMm, depthMm, cloth, settings)]
+          : strips(id, widthMm, depthMm, cloth, settings);
+      }).flat();
+    }),
+  );
+  return [...panels, ...weltPanels(cushions, usable, settings)];
+}
+
+function face(
+  id: string,
+  widthMm: number,
+  lengthMm: number,
+  { lies, repeatMm }: CoverCloth,
+  settings: CushionSettings,
+): ClothPanel {
+  const panel: ClothPanel = { id, widthMm, lengthMm, lies };
+  if (repeatMm.acrossMm <= 0 && repeatMm.alongMm <= 0) return panel;
+  // The pattern is centered on the cushion and starts at its front seam.
+  return { ...panel, controlMm: { acrossMm: widthMm / 2, alongMm: settings.seam.valueMm } };
+}
+
+/** A strip in one piece, or pieced from equal ones when it has to lie across a narrower roll. */
+function strips(
+  id: string,
+  widthMm: number,
+  lengthMm: number,
+  cloth: CoverCloth,
+  settings: CushionSettings,
+): ClothPanel[] {
+  const usable = usableWidthMm(cloth);
+  const { lies } = cloth;
+  if (lies !== 'up-roll' || widthMm <= usable) return [{ id, widthMm, lengthMm, lies }];
+  const seams = 2 * settings.seam.valueMm;
+  const pieces = Math.ceil((widthMm - seams) / (usable - seams) - 1e-9);
+  const each = (widthMm - seams) / pieces + seams;
+  return Array.from({ length: pieces }, (_, n) => ({
+    id: `${id}, piece ${n + 1}`,
+    widthMm: each,
+    lengthMm,
+    lies,
+  }));
+}
+
+function weltPanels(
+  cushions: readonly CoveredCushion[],
+  usable: number,
+  settings: CushionSettings,
+): ClothPanel[] {
+  const lengthOf = (welt: CushionMake['welt']): number =>
+    cushions.filter(({ make }) => make.welt === welt).reduce((sum, { made }) => sum + made.welt.lengthMm, 0);
+  const strip = settings.weltStrip.valueMm;
+  const straight = weltStrips(lengthOf('straight'), {
+    clothWidthMm: usable,
+    stripWidthMm: strip,
+    joinLoss: 'strip-width',
+  });
+  const bias = biasSquares(lengthOf('bias'), usable, strip);
+  return [
+    ...(straight.strips > 0
+      ? [{ id: 'welt strips', widthMm: usable, lengthMm: straight.clothMm, lies: 'up-roll' as const }]
+      : []),
+    ...bias.map((side, n) => ({
+      id: `bias square ${n + 1}`,
+      widthMm: side,
+      lengthMm: side,
+      lies: 'up-roll' as const,
+    })),
+  ];
+}
+
+/** Sides of the squares, none wider than the roll, that give so much bias strip. */
+function biasSquares(lengthMm: number, usable: number, strip: number): number[] {
+  if (lengthMm <= 0) return [];
+  const most = biasStripLength(usable, strip);
+  const whole = Math.floor(lengthMm / most);
+  const rest = lengthMm - whole * most;
+  return [...Array.from({ length: whole }, () => usable), ...(rest > 1e-6 ? [Math.sqrt(rest * strip)] : [])];
+}
