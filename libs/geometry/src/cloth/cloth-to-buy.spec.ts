@@ -61,8 +61,6 @@ describe('cloth to buy', () => {
   it('covers the panels, is bought in whole steps, and keeps its waste between none and all', () => {
     const order = ['C1', 'C2', 'C3', 'C4'].map((mark) => cushion(mark, [42.75, 17.25, 4]));
     const bought = clothToBuy(order, { ...PLAIN, startMm: inch(9) }, { tries: 400 });
-    const area = order.flatMap(({ made }) => made.panels).length;
-    expect(area).toBeGreaterThan(0);
     expect(bought.layout.lengthMm).toBeGreaterThanOrEqual(bought.layout.boundMm - 1e-6);
     expect((bought.buyMm / PLAIN.stepMm) % 1).toBeCloseTo(0, 9);
     expect(bought.buyMm).toBeGreaterThanOrEqual(bought.layout.lengthMm + inch(9));

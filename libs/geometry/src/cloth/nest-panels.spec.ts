@@ -64,15 +64,15 @@ describe('panels on a roll', () => {
           ...one,
           widthMm: Math.min(one.widthMm, 700),
           lengthMm: Math.min(one.lengthMm, 700),
-          lies: 'up-roll' as const,
           controlMm: { acrossMm: one.widthMm / 2, alongMm: 20 },
         }));
         const layout = nestPanels(asked, roll, { tries: 5 });
         expectLaid(asked, layout, roll);
         for (const placed of layout.placed) {
           const { controlMm } = asked.find(({ id }) => id === placed.id)!;
-          const across = (placed.xMm + controlMm.acrossMm) / roll.repeatMm.acrossMm;
-          const along = (placed.yMm + controlMm.alongMm) / roll.repeatMm.alongMm;
+          const [own, up] = [controlMm.acrossMm, controlMm.alongMm];
+          const across = (placed.xMm + (placed.railroaded ? up : own)) / roll.repeatMm.acrossMm;
+          const along = (placed.yMm + (placed.railroaded ? own : up)) / roll.repeatMm.alongMm;
           expect(across).toBeCloseTo(Math.round(across), 6);
           expect(along).toBeCloseTo(Math.round(along), 6);
         }
