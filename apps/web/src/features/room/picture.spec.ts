@@ -1,5 +1,11 @@
 import { createBodyModel, loadRuleBook, type FitCell, type MeasureKey } from '@settlewright/anthropometry';
-import { addPiece, emptySetDocument, tapeLines, type SetDocument } from '@settlewright/geometry';
+import {
+  addPiece,
+  choosePosture,
+  emptySetDocument,
+  tapeLines,
+  type SetDocument,
+} from '@settlewright/geometry';
 import rules from '@settlewright/seed-data/fit-rules.json';
 import summary from '@settlewright/seed-data/populations/ansur2.json';
 import { describe, expect, it } from 'vitest';
@@ -82,6 +88,19 @@ describe('what follows from a document', () => {
     ]);
     expect(bodies[0]?.statureMm).toBeCloseTo(1511.3, 6);
     expect(sheet.rows.map((row) => row.name)).toEqual(['Hetty Vance']);
+  });
+
+  it('draws a body in the posture that was chosen, and no other body anew', () => {
+    const maker = createPictureMaker(engine, [known]);
+    const usual = maker.picture(document);
+    const chosen = maker.picture(
+      choosePosture(document, added.pieceId, 2, { nudge: { leftMm: 40, aheadMm: 0 } }),
+    );
+    const shift = (n: 0 | 2) =>
+      chosen.bodies[0]!.pose.joints.pelvis[n] - usual.bodies[0]!.pose.joints.pelvis[n];
+    expect(Math.hypot(shift(0), shift(2))).toBeCloseTo(40, 6);
+    expect(chosen.bodies[0]!.mesh).not.toBe(usual.bodies[0]!.mesh);
+    expect(chosen.sheet.rows).toEqual(usual.sheet.rows);
   });
 
   it('is made once for a document, so that nothing is computed again while it is looked at', () => {

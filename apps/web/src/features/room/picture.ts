@@ -9,6 +9,7 @@ import {
 } from '@settlewright/anthropometry';
 import {
   deriveParts,
+  footRailOf,
   mannequinMesh,
   measureSet,
   placeFrames,
@@ -17,6 +18,7 @@ import {
   type MannequinPose,
   type Part,
   type PlaceFrame,
+  type PostureChoice,
   type SetDocument,
   type Vec3,
 } from '@settlewright/geometry';
@@ -79,11 +81,19 @@ function crownOf(pose: MannequinPose, frame: PlaceFrame): Vec3 {
 /** Remembers the last body drawn at a place, so that a change elsewhere costs nothing. */
 function createBodyMaker() {
   const kept = new Map<string, { key: string; pose: MannequinPose; mesh: MannequinMesh }>();
-  return (frame: PlaceFrame, situation: PlaceSituation, body: BodyInput) => {
+  return (
+    frame: PlaceFrame,
+    situation: PlaceSituation,
+    body: BodyInput,
+    parts: readonly Part[],
+    choice: PostureChoice | undefined,
+  ) => {
     // A slipped digit in one measure may put another below nothing: that person is named, the others are drawn.
     if (Object.values(body.means).some((value) => !(value > 0))) return undefined;
     const sinkMm = situation.foam ? seatSinkMm(situation.foam, body.weightKg).sinkMm : 0;
-    const input = { means: body.means, shoeMm: body.shoeMm, frame, situation, sinkMm };
+    const { means, shoeMm } = body;
+    const around = { ...situation, footRail: footRailOf(parts, frame) };
+    const input = { means, shoeMm, frame, situation: around, sinkMm, choice };
     const key = JSON.stringify(input);
     const last = kept.get(frame.placeId);
     if (last?.key === key) return last;
@@ -161,18 +171,19 @@ export function createPictureMaker(
     document: SetDocument,
     situation: SetSituation,
     bodies: ReadonlyMap<string, BodyInput>,
+    parts: readonly Part[],
   ): SeatedBody[] {
     const frames = new Map(
       document.pieces.flatMap((piece) => placeFrames(piece, document)).map((frame) => [frame.placeId, frame]),
     );
     const colourAt = coloursOf(document, cast);
-    return document.seating.flatMap(({ pieceId, place, sitter }): SeatedBody[] => {
+    return document.seating.flatMap(({ pieceId, place, sitter, posture }): SeatedBody[] => {
       const placeId = `${pieceId}:${place}`;
       const frame = frames.get(placeId);
       const body = bodies.get(placeId);
       const measured = situation.places.find((candidate) => candidate.placeId === placeId);
       if (!frame || !body || !measured) return [];
-      const made = makeBody(frame, measured, body);
+      const made = makeBody(frame, measured, body, parts, posture);
       if (!made) return [];
       const { pose, mesh } = made;
       return [
@@ -196,11 +207,12 @@ export function createPictureMaker(
     if (known) return known;
     const situation = situationOf(document);
     const inputsOf = inputs(document);
-    const bodies = bodiesOf(document, situation, inputsOf);
+    const parts = deriveParts(document);
+    const bodies = bodiesOf(document, situation, inputsOf, parts);
     const drawn = new Set(bodies.map(({ placeId }) => placeId));
     const whole: RoomPicture = {
       document,
-      parts: deriveParts(document),
+      parts,
       situation,
       sheet: check(document),
       bodies,
