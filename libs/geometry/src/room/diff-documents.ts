@@ -6,7 +6,7 @@ import { isSame, leavesOf } from './leaves.ts';
 export interface DocumentDifference {
   /** Stable while the three versions stay the same. */
   id: string;
-  kind: 'parameter' | 'piece' | 'seating' | 'asked' | 'known-difference' | 'group';
+  kind: 'parameter' | 'piece' | 'seating' | 'asked' | 'known-difference' | 'group' | 'view';
   pieceId?: string;
   mark?: string;
   /** Path of the parameter in its piece. */
@@ -68,6 +68,7 @@ export function diffDocuments(
     ...askedDifferences(base, mine, theirs),
     ...noteDifferences(base, mine, theirs),
     ...groupDifferences(base, mine, theirs),
+    ...viewDifferences(base, mine, theirs),
   ];
 }
 
@@ -230,6 +231,24 @@ function groupDifferences(
     const name = (values.mine ?? values.theirs)?.name ?? id;
     return compared(
       { id: `group:${id}`, kind: 'group', key: id, label: `Group “${name}”` },
+      values,
+      base !== null,
+    );
+  });
+}
+
+function viewDifferences(
+  base: SetDocument | null,
+  mine: SetDocument,
+  theirs: SetDocument,
+): DocumentDifference[] {
+  const find = (document: SetDocument | null, id: string) => document?.views?.find((view) => view.id === id);
+  const ids = new Set([theirs, mine].flatMap(({ views = [] }) => views.map(({ id }) => id)));
+  return [...ids].flatMap((id) => {
+    const values = { base: find(base, id), mine: find(mine, id), theirs: find(theirs, id) };
+    const name = (values.mine ?? values.theirs)?.name ?? id;
+    return compared(
+      { id: `view:${id}`, kind: 'view', key: id, label: `View “${name}”` },
       values,
       base !== null,
     );

@@ -1,5 +1,6 @@
 import { TAPE_MEASURE_KEYS } from '@settlewright/anthropometry';
 import { z } from 'zod';
+import { MAX_VIEWS, namedViewSchema } from '../views/named-view.ts';
 import { postureChoiceSchema } from './posture-choice.ts';
 
 /** Number of the document layout; raised with an upgrade in `upgrades.ts`. */
@@ -244,6 +245,8 @@ export const setDocumentSchema = z.strictObject({
     )
     .max(100)
     .optional(),
+  /** Views that somebody gave a name to, in the order they were kept. */
+  views: z.array(namedViewSchema).max(MAX_VIEWS).optional(),
 });
 
 export type SetDocument = z.infer<typeof setDocumentSchema>;

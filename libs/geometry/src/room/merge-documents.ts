@@ -1,6 +1,7 @@
 import { fail, ok, type Result } from '../units/result.ts';
 import { diffDocuments, type DocumentDifference } from './diff-documents.ts';
 import type { Piece, PieceGroup, SetDocument, SitterRef } from './document.ts';
+import type { NamedView } from '../views/named-view.ts';
 import { freeId, nextMark } from './edit-pieces.ts';
 import { withoutLostMembers } from './groups.ts';
 import { withPath } from './leaves.ts';
@@ -98,6 +99,8 @@ function withMine(merged: SetDocument, difference: DocumentDifference): SetDocum
     }
     case 'group':
       return withMyGroup(merged, key, mine as PieceGroup | undefined);
+    case 'view':
+      return withMyView(merged, key, mine as NamedView | undefined);
   }
 }
 
@@ -110,6 +113,18 @@ function withMyGroup(
   const others = groups?.filter((group) => group.id !== id) ?? [];
   const all = mine === undefined ? others : [...others, mine];
   return all.length === 0 ? merged : { ...merged, groups: all };
+}
+
+/** A view keeps its place in the list where both sides have it. */
+function withMyView(
+  { views = [], ...merged }: SetDocument,
+  id: string,
+  mine: NamedView | undefined,
+): SetDocument {
+  const isThere = views.some((view) => view.id === id);
+  const others = views.flatMap((view) => (view.id !== id ? [view] : mine === undefined ? [] : [mine]));
+  const all = mine === undefined || isThere ? others : [...others, mine];
+  return all.length === 0 ? merged : { ...merged, views: all };
 }
 
 /** Whoever sits there now; how they sit stays unless that differs as well. */
