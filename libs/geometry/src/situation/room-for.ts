@@ -3,6 +3,7 @@ import { derivePieceParts } from '../pieces/kinds.ts';
 import { parametersOf, setParameter } from '../pieces/parameters.ts';
 import { standsInWall, windowLeavesWall } from '../pieces/wall-window.ts';
 import type { Piece, SetDocument } from '../room/document.ts';
+import type { Result } from '../units/result.ts';
 import { boxesMeet, convexPart, reachIntoEachOther, type ConvexPart } from './convex-part.ts';
 
 /** How far a number goes before the piece comes upon another. */
@@ -21,6 +22,9 @@ export interface RoomFor {
   most?: RoomLimit;
   least?: RoomLimit;
 }
+
+/** Makes the set with another value of a number. */
+type Change = (document: SetDocument, value: number) => Result<SetDocument, unknown>;
 
 /** Pieces that share no more than this only touch, millimetres. */
 const TOUCHING_MM = 0.01;
@@ -45,14 +49,20 @@ const LIFT_STEP_MM = 10;
  * @param document - the set
  * @param pieceId - the piece whose number is asked about
  * @param key - a length of `parametersOf`; positions and angles have no such limits
+ * @param change - how the number is changed; about the middle of the piece when left out
  * @returns the nearest limits on both sides, within those of the piece itself
  */
-export function roomFor(document: SetDocument, pieceId: string, key: string): RoomFor {
+export function roomFor(
+  document: SetDocument,
+  pieceId: string,
+  key: string,
+  change: Change = (set, value) => setParameter(set, pieceId, key, value),
+): RoomFor {
   const piece = document.pieces.find((one) => one.id === pieceId);
   const parameter = piece && parametersOf(piece).find((one) => one.key === key);
   if (piece === undefined || parameter?.kind !== 'length' || key.startsWith('at.')) return {};
   const now = Number(parameter.value);
-  const blockedAt = obstaclesTo(document, piece, parameter);
+  const blockedAt = obstaclesTo(document, piece, parameter, change);
   const lifts = LIFTING.has(`${piece.kind} ${key}`);
   const blockedNow = blockedAt(now);
   const stops = (value: number) => blockedAt(value).find((other) => !blockedNow.includes(other));
@@ -125,11 +135,12 @@ function obstaclesTo(
   document: SetDocument,
   piece: Piece,
   parameter: Parameter,
+  change: Change,
 ): (value: number) => readonly Piece[] {
   // Who sits where is of no matter here, and costs time to keep in order.
   const bare = { ...document, seating: [] };
   const pieceAt = (value: number): Piece => {
-    const changed = setParameter(bare, piece.id, parameter.key, value);
+    const changed = change(bare, value);
     return (changed.ok && changed.value.pieces.find((one) => one.id === piece.id)) || piece;
   };
   // A wall is taken with the openings it has; a window and its own wall are compared as such.
