@@ -1,5 +1,6 @@
 import { useEffect } from 'react';
 import { registerUnsentWork } from '@/lib/unsent-work.ts';
+import { wipeClip } from './clipboard/clip.ts';
 import { countUnsent, wipeUnsent } from './save/outbox.ts';
 
 /** Signing out asks about every set of this person whose changes only this device has. */
@@ -12,7 +13,10 @@ export function useUnsentSets(userId: string): void {
           const sets = await countUnsent(userId);
           return sets === 1 ? 'changes to one set' : `changes to ${sets} sets`;
         },
-        wipe: () => wipeUnsent(userId),
+        wipe: () => {
+          wipeClip();
+          return wipeUnsent(userId);
+        },
       }),
     [userId],
   );

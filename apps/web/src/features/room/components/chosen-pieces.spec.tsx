@@ -8,6 +8,7 @@ import { MemoryRouter } from 'react-router-dom';
 import { Toaster } from 'sonner';
 import { beforeEach, describe, expect, it } from 'vitest';
 import { useAnnouncement } from '@/lib/announce.ts';
+import { useClipboard } from '../clipboard/use-clipboard.ts';
 import { useRoomAddress } from '../hooks/use-address.ts';
 import { useChoosing } from '../hooks/use-choosing.ts';
 import { useGroupActions } from '../hooks/use-group-actions.ts';
@@ -28,6 +29,7 @@ function Desk() {
   const choosing = useChoosing(document, address);
   const group = useGroupActions(address.choose);
   const actions = usePieceActions(address.select);
+  const clipboard = useClipboard(address.choose);
   return (
     <>
       <button type="button" onClick={() => choosing.setSeveral(!choosing.several)}>
@@ -38,9 +40,11 @@ function Desk() {
         selectedPieceId={address.pieceId}
         onSelect={address.select}
         actions={actions}
-        choosing={choosing}
+        several={{ choosing, clipboard }}
       />
-      {choosing.pieces.length > 1 && <ChosenPieces document={document} choosing={choosing} actions={group} />}
+      {choosing.pieces.length > 1 && (
+        <ChosenPieces document={document} choosing={choosing} actions={group} onCopy={clipboard.copy} />
+      )}
     </>
   );
 }

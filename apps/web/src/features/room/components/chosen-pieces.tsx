@@ -11,6 +11,8 @@ import { Button } from '@/components/button.tsx';
 import { MarkTag, timberOf } from '@/components/mark-tag.tsx';
 import type { Choosing } from '../hooks/use-choosing.ts';
 import { AXIS_WORDS, type GroupActions } from '../hooks/use-group-actions.ts';
+import { openHandForm } from '../together/hand-form.ts';
+import { KeepGroup } from '../together/keep-group.tsx';
 import { SharedNumbersDialog } from './shared-numbers-dialog.tsx';
 
 const EDGES: readonly [AlignEdge, string][] = [
@@ -27,10 +29,11 @@ interface Props {
   document: SetDocument;
   choosing: Choosing;
   actions: GroupActions;
+  onCopy: (pieces: readonly Piece[]) => void;
 }
 
 /** Several pieces in the hand: which one stays, and what can be done to all. */
-export function ChosenPieces({ document, choosing, actions }: Props) {
+export function ChosenPieces({ document, choosing, actions, onCopy }: Props) {
   const [numbersOpen, setNumbersOpen] = useState(false);
   const { pieces } = choosing;
   const [first] = pieces;
@@ -38,6 +41,7 @@ export function ChosenPieces({ document, choosing, actions }: Props) {
   const ids = pieces.map(({ id }) => id);
   const free = pieces.filter(({ locked }) => !locked);
   const canSpace = spaceable(document, ids).length >= 3;
+  const allHidden = pieces.every(({ hidden }) => hidden);
   const alike = pieces.every(({ kind }) => kind === first.kind);
   const full = document.pieces.length + pieces.length > MAX_PIECES;
   return (
@@ -84,7 +88,7 @@ export function ChosenPieces({ document, choosing, actions }: Props) {
           <Button size="small" disabled={full} onClick={() => actions.copy(pieces)}>
             Copy
           </Button>
-          <Button size="small" onClick={() => actions.remove(pieces)}>
+          <Button size="small" disabled={free.length === 0} onClick={() => actions.remove(pieces)}>
             Remove
           </Button>
           {alike && (
@@ -92,6 +96,28 @@ export function ChosenPieces({ document, choosing, actions }: Props) {
               Their numbers
             </Button>
           )}
+        </Row>
+      </div>
+      <div className="flex flex-wrap gap-x-8 gap-y-3">
+        <Row title="Again">
+          <Button size="small" onClick={() => openHandForm('mirror', ids)}>
+            Mirror
+          </Button>
+          <Button size="small" disabled={full} onClick={() => openHandForm('row', ids)}>
+            Repeat in a row
+          </Button>
+          <Button size="small" onClick={() => onCopy(pieces)}>
+            Copy for another set
+          </Button>
+        </Row>
+        <Row title="Keep">
+          <KeepGroup pieces={pieces} />
+          <Button size="small" onClick={() => actions.mark(pieces, 'hidden', !allHidden)}>
+            {allHidden ? 'Show' : 'Hide'}
+          </Button>
+          <Button size="small" onClick={() => actions.mark(pieces, 'locked', free.length > 0)}>
+            {free.length > 0 ? 'Lock' : 'Unlock'}
+          </Button>
         </Row>
       </div>
       {!alike && (

@@ -1,12 +1,17 @@
 import type { FitSheet, RuleBook, VerdictOutcome } from '@settlewright/anthropometry';
 import {
+  formatLength,
+  LEAF_WORDS,
   parametersOf,
   type DocumentDifference,
   type LengthStyle,
+  type PieceGroup,
+  type PieceOf,
   type SetDocument,
   type SitterRef,
 } from '@settlewright/geometry';
 import type { CastMember } from '@/lib/contract.ts';
+import { joinWords } from '../choosing-words.ts';
 import { showNumber } from '../numbers.ts';
 import { sitterName } from '../sitters.ts';
 import { shortName } from '@/lib/short-name.ts';
@@ -34,6 +39,19 @@ function isSitter(value: unknown): value is SitterRef {
   return typeof value === 'object' && value !== null && 'kind' in value;
 }
 
+type TableLeaves = NonNullable<PieceOf<'table'>['leaves']>;
+
+/** "left leaf 10″, hanging and right leaf 10″, up". */
+function sayLeaves(leaves: TableLeaves, style: LengthStyle): string {
+  const each = (['left', 'right', 'front', 'back'] as const).flatMap((edge) => {
+    const leaf = leaves[edge];
+    return leaf
+      ? [`${LEAF_WORDS[edge]} ${formatLength(leaf.widthMm, style)} ${leaf.down ? 'hanging' : 'up'}`]
+      : [];
+  });
+  return joinWords(each);
+}
+
 /** One side of a difference as a person reads it. */
 export function sayValue(difference: DocumentDifference, side: Side | 'base', words: WordsOf): string {
   const { kind, key = '', pieceId } = difference;
@@ -44,6 +62,12 @@ export function sayValue(difference: DocumentDifference, side: Side | 'base', wo
   }
   if (kind === 'piece') return 'kept';
   if (kind === 'known-difference') return (value as SetDocument['knownDifferences'][number]).text;
+  if (kind === 'group') {
+    const { pieceIds } = value as PieceGroup;
+    const { pieces } = words.documents[side];
+    return joinWords(pieces.filter(({ id }) => pieceIds.includes(id)).map(({ mark }) => mark));
+  }
+  if (key === 'leaves') return sayLeaves(value as TableLeaves, words.style);
   if (kind === 'seating' && isSitter(value)) return sitterName(value, words.cast);
   if (key === 'at' && typeof value === 'object') return 'moved';
   const piece = words.documents[side].pieces.find((candidate) => candidate.id === pieceId);

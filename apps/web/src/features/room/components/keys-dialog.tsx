@@ -40,6 +40,7 @@ const GROUPS: { title: string; keys: [keys: string, does: string][] }[] = [
       ['Shift Space, Shift Enter', 'the same, on a row of the list'],
       ['Ctrl A', 'choose all, in the drawing or in the list'],
       ['Arrows, comma, full stop, Delete', 'as for one, in the drawing'],
+      ['Ctrl C, Ctrl V', 'copy what is chosen in the drawing, paste it here or in another set'],
     ],
   },
 ];

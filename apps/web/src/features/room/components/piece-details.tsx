@@ -1,5 +1,7 @@
 import {
   formatLength,
+  LEAF_WORDS,
+  leavesOfTable,
   placeFrames,
   setParameter,
   snapToBoards,
@@ -13,6 +15,7 @@ import { Menu } from '@/components/menu.tsx';
 import type { PieceActions } from '../hooks/use-piece-actions.ts';
 import { useSurroundings } from '../room-context.tsx';
 import { sitterName } from '../sitters.ts';
+import { openHandForm } from '../together/hand-form.ts';
 import { NumbersDialog } from './numbers-dialog.tsx';
 import { PlacesDialog } from './places-dialog.tsx';
 import { shortName } from '@/lib/short-name.ts';
@@ -23,10 +26,11 @@ interface Props {
   actions: PieceActions;
   /** Chooses several pieces, the first of which stays; left out where nothing can be changed. */
   onChoose?: (pieceIds: readonly string[]) => void;
+  onCopy?: (pieces: readonly Piece[]) => void;
 }
 
 /** What the row of the selected piece opens: who sits there, and what can be done. */
-export function PieceDetails({ piece, document, actions, onChoose }: Props) {
+export function PieceDetails({ piece, document, actions, onChoose, onCopy }: Props) {
   const { cast, canEdit, style } = useSurroundings();
   const [open, setOpen] = useState<'numbers' | 'places' | null>(null);
   const frames = placeFrames(piece, document);
@@ -59,7 +63,7 @@ export function PieceDetails({ piece, document, actions, onChoose }: Props) {
             name={`More of ${piece.mark}, menu`}
             button="More"
             buttonClassName="link min-h-6"
-            entries={moreEntries(piece, document, actions, style, onChoose)}
+            entries={moreEntries({ piece, document, actions, onChoose, onCopy }, style)}
           />
         )}
       </p>
@@ -100,13 +104,25 @@ function boardEntries(piece: Piece, document: SetDocument, actions: PieceActions
   ];
 }
 
-function moreEntries(
-  piece: Piece,
-  document: SetDocument,
-  actions: PieceActions,
-  style: LengthStyle,
-  onChoose: Props['onChoose'],
-) {
+/** Lifts and drops the leaves of a table. */
+function leafEntries(piece: Piece, document: SetDocument, actions: PieceActions) {
+  if (piece.kind !== 'table') return [];
+  return leavesOfTable(piece).map(({ edge, down }) => {
+    const words = LEAF_WORDS[edge];
+    return {
+      id: `leaf-${edge}`,
+      words: `${down ? 'Lift' : 'Drop'} the ${words}`,
+      disabled: piece.locked,
+      onPress: () => {
+        const changed = setParameter(document, piece.id, `leaves.${edge}.state`, down ? 'up' : 'down');
+        if (changed.ok)
+          actions.replace(changed.value, `${piece.mark} ${words} ${down ? 'lifted' : 'dropped'}`);
+      },
+    };
+  });
+}
+
+function moreEntries({ piece, document, actions, onChoose, onCopy }: Props, style: LengthStyle) {
   const like = document.pieces.filter((other) => other.kind === piece.kind).map((other) => other.id);
   const ids = [piece.id, ...like.filter((id) => id !== piece.id)];
   return [
@@ -121,9 +137,20 @@ function moreEntries(
       disabled: ids.length < 2,
       onPress: () => onChoose?.(ids),
     },
+    { id: 'mirror', words: 'Mirror', onPress: () => openHandForm('mirror', [piece.id]) },
+    { id: 'row', words: 'Repeat in a row', onPress: () => openHandForm('row', [piece.id]) },
+    { id: 'carry', words: 'Copy for another set', onPress: () => onCopy?.([piece]) },
+    ...leafEntries(piece, document, actions),
+    {
+      id: 'hide',
+      words: piece.hidden ? 'Show' : 'Hide',
+      detail: piece.hidden ? undefined : 'still measured',
+      onPress: () => actions.setFlag(piece, 'hidden', !piece.hidden),
+    },
     {
       id: 'lock',
-      words: piece.locked ? 'Unlock its place' : 'Lock its place',
+      words: piece.locked ? 'Unlock' : 'Lock',
+      detail: piece.locked ? undefined : 'no moving, shaping, removing',
       onPress: () => actions.setFlag(piece, 'locked', !piece.locked),
     },
     {
@@ -132,6 +159,11 @@ function moreEntries(
       detail: piece.accessible ? undefined : 'asks the clauses',
       onPress: () => actions.setFlag(piece, 'accessible', !piece.accessible),
     },
-    { id: 'remove', words: `Remove ${piece.mark}`, onPress: () => actions.remove(piece) },
+    {
+      id: 'remove',
+      words: `Remove ${piece.mark}`,
+      disabled: piece.locked,
+      onPress: () => actions.remove(piece),
+    },
   ];
 }

@@ -1,13 +1,16 @@
 import { formatLength, type Piece, type SetDocument } from '@settlewright/geometry';
 import { useMemo, type KeyboardEvent, type MouseEvent, type ReactNode } from 'react';
+import { Button } from '@/components/button.tsx';
 import { classNames } from '@/components/class-names.ts';
 import { MarkTag, timberOf } from '@/components/mark-tag.tsx';
 import { Measure } from '@/components/measure.tsx';
 import { Menu } from '@/components/menu.tsx';
 import { RuleHeading } from '@/components/rule-heading.tsx';
+import type { Clipboard } from '../clipboard/use-clipboard.ts';
 import { adds, type Choosing } from '../hooks/use-choosing.ts';
 import { KIND_WORDS, type PieceActions } from '../hooks/use-piece-actions.ts';
 import { useSurroundings } from '../room-context.tsx';
+import { GroupsList } from '../together/groups-list.tsx';
 import { PieceDetails } from './piece-details.tsx';
 
 const KINDS = ['bench', 'table', 'loose-seat', 'sill', 'bulkhead', 'overhead'] as const;
@@ -23,13 +26,21 @@ interface Props {
   onSelect: (pieceId: string | undefined) => void;
   actions: PieceActions;
   /** Left out where only one piece can be looked at. */
-  choosing?: Choosing;
+  several?: { choosing: Choosing; clipboard: Clipboard };
   /** Filled by the page: the order that a piece's cushions are in. */
   aboutPiece?: (piece: Piece) => ReactNode;
 }
 
 /** The schedule of pieces: mark, name, length; the selected one opens. */
-export function PiecesPanel({ document, selectedPieceId, onSelect, actions, choosing, aboutPiece }: Props) {
+export function PiecesPanel({
+  document,
+  selectedPieceId,
+  onSelect,
+  actions,
+  several: hand,
+  aboutPiece,
+}: Props) {
+  const choosing = hand?.choosing;
   const { canEdit, style } = useSurroundings();
   const entries = useMemo(
     () =>
@@ -99,14 +110,33 @@ export function PiecesPanel({ document, selectedPieceId, onSelect, actions, choo
                 <MarkTag mark={piece.mark} timber={timberOf(piece.kind)} selected={chosen} />
                 <span
                   title={piece.name || KIND_WORDS[piece.kind]}
-                  className={classNames('min-w-0 flex-1 truncate text-[0.94rem]', chosen && 'font-semibold')}
+                  className={classNames(
+                    'min-w-0 flex-1 truncate text-[0.94rem]',
+                    chosen && 'font-semibold',
+                    piece.hidden && 'text-ink-3',
+                  )}
                 >
                   {piece.name || KIND_WORDS[piece.kind]}
                 </span>
+                {(piece.hidden === true || piece.locked) && (
+                  <span className="text-xs text-ink-2">{piece.hidden ? 'hidden' : 'locked'}</span>
+                )}
                 <span className={classNames('pr-1 text-sm', chosen && 'font-semibold')}>
                   <Measure text={formatLength(lengthOf(piece), { ...style, feet: true })} />
                 </span>
               </button>
+              {piece.hidden && choosing && (
+                <p className="pb-1 pl-1 text-xs text-ink-2">
+                  Not drawn, still measured.{' '}
+                  <Button
+                    look="word"
+                    className="text-xs!"
+                    onClick={() => actions.setFlag(piece, 'hidden', false)}
+                  >
+                    Show {piece.mark}
+                  </Button>
+                </p>
+              )}
               {selected && !several && (
                 <div className="pb-2.5 pl-1">
                   <PieceDetails
@@ -114,6 +144,7 @@ export function PiecesPanel({ document, selectedPieceId, onSelect, actions, choo
                     document={document}
                     actions={actions}
                     onChoose={choosing?.choose}
+                    onCopy={hand?.clipboard.copy}
                   />
                   {aboutPiece?.(piece)}
                 </div>
@@ -122,6 +153,12 @@ export function PiecesPanel({ document, selectedPieceId, onSelect, actions, choo
           );
         })}
       </ul>
+      {choosing && <GroupsList document={document} choosing={choosing} />}
+      {hand?.clipboard.words && (
+        <Button look="word" className="mt-2 text-sm" onClick={hand.clipboard.paste}>
+          {hand.clipboard.words}
+        </Button>
+      )}
     </section>
   );
 }

@@ -3,6 +3,7 @@ import { useMemo, useState, type ReactNode } from 'react';
 import { useStore } from 'zustand';
 import { Button } from '@/components/button.tsx';
 import type { SetInfo } from '../api.ts';
+import { useClipboard } from '../clipboard/use-clipboard.ts';
 import { SaveDrawingButton } from '../export/save-drawing-button.tsx';
 import { useRoomAddress } from '../hooks/use-address.ts';
 import { useChoosing } from '../hooks/use-choosing.ts';
@@ -13,6 +14,8 @@ import { useSavedCell } from '../hooks/use-saved-cell.ts';
 import { useShortcuts, type ShortcutActions } from '../hooks/use-shortcuts.ts';
 import { RoomContext, useAutosave, usePicture, useSurroundings } from '../room-context.tsx';
 import { useRoomStore, useUndo } from '../store.ts';
+import { HandFormPanel } from '../together/hand-form-panel.tsx';
+import { useHandForm } from '../together/hand-form.ts';
 import { WaysPanel } from '../ways/ways-panel.tsx';
 import { ChosenPieces } from './chosen-pieces.tsx';
 import { ConflictScreen } from './conflict-screen.tsx';
@@ -45,6 +48,8 @@ export function RoomDesk({ lastRevision, foot, aboutPiece }: Props) {
   const actions = usePieceActions(address.select);
   const choosing = useChoosing(picture.document, address);
   const groupActions = useGroupActions(address.choose);
+  const clipboard = useClipboard(address.choose);
+  const handForm = useHandForm((state) => state.open);
   const { undoStep, redoStep } = useUndo();
   const [helpOpen, setHelpOpen] = useState(false);
   const { clientView } = address;
@@ -97,12 +102,19 @@ export function RoomDesk({ lastRevision, foot, aboutPiece }: Props) {
                   piece={piece}
                   address={address}
                   actions={actions}
-                  several={mayChange ? { choosing, actions: groupActions } : undefined}
+                  several={mayChange ? { choosing, actions: groupActions, clipboard } : undefined}
                   onOpenCell={openCell}
                 />
                 {!address.fitOpen &&
-                  (mayChange && choosing.pieces.length > 1 ? (
-                    <ChosenPieces document={document} choosing={choosing} actions={groupActions} />
+                  (mayChange && handForm ? (
+                    <HandFormPanel choose={address.choose} />
+                  ) : mayChange && choosing.pieces.length > 1 ? (
+                    <ChosenPieces
+                      document={document}
+                      choosing={choosing}
+                      actions={groupActions}
+                      onCopy={clipboard.copy}
+                    />
                   ) : piece ? (
                     <div className="pb-4">
                       <SpecSentence key={piece.id} piece={piece} />
@@ -124,7 +136,7 @@ export function RoomDesk({ lastRevision, foot, aboutPiece }: Props) {
               selectedPieceId={address.pieceId}
               onSelect={address.select}
               actions={actions}
-              choosing={mayChange ? choosing : undefined}
+              several={mayChange ? { choosing, clipboard } : undefined}
               aboutPiece={aboutPiece}
             />
             {!empty && <KeyPlan picture={picture} address={address} />}

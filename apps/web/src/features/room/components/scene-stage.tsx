@@ -2,6 +2,7 @@ import { tapeLines, type Piece } from '@settlewright/geometry';
 import { lazy, Suspense, useId, useMemo, useRef, useState } from 'react';
 import { LoadingLine } from '@/components/loading.tsx';
 import { useTheme } from '@/lib/theme.ts';
+import type { Clipboard } from '../clipboard/use-clipboard.ts';
 import { joinWords } from '../choosing-words.ts';
 import type { Choosing } from '../hooks/use-choosing.ts';
 import type { GroupActions } from '../hooks/use-group-actions.ts';
@@ -16,6 +17,7 @@ import type { RoomPicture } from '../picture.ts';
 import { useSurroundings } from '../room-context.tsx';
 import { isBehind, isToScale, VIEW_TITLES } from '../scene/views.ts';
 import { useRoom } from '../store.ts';
+import { HiddenNote } from '../together/hidden-note.tsx';
 import { WayOnScene } from '../ways/way-on-scene.tsx';
 import { EyeMark } from './eye-mark.tsx';
 import { SceneErrorBoundary } from './scene-error-boundary.tsx';
@@ -40,7 +42,7 @@ interface Props {
   address: RoomAddress;
   actions: PieceActions;
   /** Left out where only one piece can be looked at. */
-  several?: { choosing: Choosing; actions: GroupActions };
+  several?: { choosing: Choosing; actions: GroupActions; clipboard?: Clipboard };
   onOpenCell: (cellId: string) => void;
 }
 
@@ -84,7 +86,15 @@ export function SceneStage({ picture, piece, address, actions, several, onOpenCe
       : [];
   const bodies = showBodies ? picture.bodies.filter((body) => isBehind(body.crownMm, view.cut)) : [];
 
-  const keys = useStageKeys({ piece, address, hand, actions, choosing: several?.choosing, group });
+  const keys = useStageKeys({
+    piece,
+    address,
+    hand,
+    actions,
+    choosing: several?.choosing,
+    group,
+    clipboard: several?.clipboard,
+  });
 
   return (
     <section aria-label="Drawing of the set" className="flex min-h-0 flex-1 flex-col">
@@ -101,6 +111,7 @@ export function SceneStage({ picture, piece, address, actions, several, onOpenCe
           Look at the entry under People.
         </p>
       )}
+      <HiddenNote document={picture.document} actions={several?.actions} />
       <div
         ref={sheet}
         role="application"

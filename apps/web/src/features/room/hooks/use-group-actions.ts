@@ -5,6 +5,7 @@ import {
   lengthStep,
   movePieces,
   removePieces,
+  shownPiece,
   spacePieces,
   turnPieces,
   type AlignEdge,
@@ -39,16 +40,35 @@ export interface GroupActions {
   turn: (pieces: readonly Piece[], byDeg: number) => void;
   copy: (pieces: readonly Piece[]) => void;
   remove: (pieces: readonly Piece[]) => void;
+  /** Hides, shows, locks or unlocks. */
+  mark: (pieces: readonly Piece[], flag: PieceFlag, on: boolean) => void;
   /** The first piece stays. */
   lineUp: (pieces: readonly Piece[], edge: AlignEdge) => void;
   /** The first piece stays. */
   space: (pieces: readonly Piece[], axis: RoomAxis) => void;
 }
 
+const FLAG_WORDS = {
+  hidden: ['shown', 'hidden, still measured'],
+  locked: ['unlocked', 'locked'],
+  accessible: ['no longer accessible', 'marked accessible'],
+} as const;
+
+export type PieceFlag = keyof typeof FLAG_WORDS;
+
+/** A piece with a flag set; what is not hidden carries no mark of it. */
+export function withFlag(piece: Piece, flag: PieceFlag, on: boolean): Piece {
+  return flag === 'hidden' && !on ? shownPiece(piece) : { ...piece, [flag]: on };
+}
+
+/** "T1 locked", "3 pieces hidden, still measured". */
+export const sayFlag = (what: string, flag: PieceFlag, on: boolean): string =>
+  `${what} ${FLAG_WORDS[flag][on ? 1 : 0]}`;
+
 const idsOf = (pieces: readonly Piece[]) => pieces.map(({ id }) => id);
 
 /** "B2 is locked and stays": what a step left out. */
-function sayLocked(pieces: readonly Piece[]): string | undefined {
+export function sayLocked(pieces: readonly Piece[]): string | undefined {
   const marks = pieces.filter(({ locked }) => locked).map(({ mark }) => mark);
   if (marks.length === 0) return undefined;
   return marks.length === 1 ? `${marks[0]} is locked and stays` : `${joinWords(marks)} are locked and stay`;
@@ -91,8 +111,19 @@ export function useGroupActions(choose: (ids: readonly string[]) => void): Group
         choose(pieceIds);
       },
       remove: (pieces) => {
-        take(removePieces(now(), idsOf(pieces)), `Remove ${pieces.length} pieces`);
-        choose([]);
+        const locked = sayLocked(pieces);
+        const free = pieces.filter((piece) => !piece.locked);
+        const next = removePieces(now(), idsOf(pieces));
+        if (free.length === 0) toast(`${locked}.`);
+        else take(next, `Remove ${free.length === 1 ? free[0]?.mark : `${free.length} pieces`}`, locked);
+        choose(idsOf(pieces.filter((piece) => piece.locked)));
+      },
+      mark: (pieces, flag, on) => {
+        const ids = new Set(idsOf(pieces));
+        const next = now().pieces.map((piece) => (ids.has(piece.id) ? withFlag(piece, flag, on) : piece));
+        const [first] = pieces;
+        const what = pieces.length === 1 && first ? first.mark : `${pieces.length} pieces`;
+        take({ ...now(), pieces: next }, sayFlag(what, flag, on));
       },
       lineUp: (pieces, edge) =>
         arrange(

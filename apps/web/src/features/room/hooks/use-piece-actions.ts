@@ -12,9 +12,11 @@ import {
   type SitterRef,
 } from '@settlewright/geometry';
 import { useMemo } from 'react';
+import { toast } from 'sonner';
 import { useSurroundings } from '../room-context.tsx';
 import { sitterName } from '../sitters.ts';
 import { useRoomStore } from '../store.ts';
+import { sayFlag, withFlag, type PieceFlag } from './use-group-actions.ts';
 import { useTakeStep } from './use-take-step.ts';
 import { shortName } from '@/lib/short-name.ts';
 
@@ -35,7 +37,7 @@ export interface PieceActions {
   nudge: (piece: Piece, stepsX: number, stepsZ: number) => void;
   turn: (piece: Piece, byDeg: number) => void;
   place: (piece: Piece, at: Partial<Piece['at']>) => void;
-  setFlag: (piece: Piece, flag: 'locked' | 'accessible', on: boolean) => void;
+  setFlag: (piece: Piece, flag: PieceFlag, on: boolean) => void;
   rename: (piece: Piece, name: string) => void;
   seat: (piece: Piece, place: number, sitter: SitterRef | null) => void;
   replace: (document: SetDocument, step: string) => void;
@@ -49,10 +51,15 @@ export function usePieceActions(select: (pieceId: string | undefined) => void): 
 
   return useMemo(() => {
     const now = () => store.getState().document;
-    const change = (piece: Piece, patch: Partial<Piece>): SetDocument => ({
+    const change = (piece: Piece, changed: (old: Piece) => Piece): SetDocument => ({
       ...now(),
-      pieces: now().pieces.map((old) => (old.id === piece.id ? ({ ...old, ...patch } as Piece) : old)),
+      pieces: now().pieces.map((old) => (old.id === piece.id ? changed(old) : old)),
     });
+    const mayChange = ({ id, mark }: Piece): boolean => {
+      const { locked } = now().pieces.find((one) => one.id === id) ?? { locked: false };
+      if (locked) toast(`${mark} is locked; unlock it to change it.`);
+      return !locked;
+    };
 
     return {
       add: (kind) => {
@@ -62,6 +69,7 @@ export function usePieceActions(select: (pieceId: string | undefined) => void): 
         select(added.pieceId);
       },
       remove: (piece) => {
+        if (!mayChange(piece)) return;
         take(removePiece(now(), piece.id), `Removed ${piece.mark}`);
         select(undefined);
       },
@@ -71,25 +79,31 @@ export function usePieceActions(select: (pieceId: string | undefined) => void): 
         select(copied.pieceId);
       },
       nudge: (piece, stepsX, stepsZ) => {
+        if (!mayChange(piece)) return;
         const step = lengthStep(style);
         const to = { xMm: piece.at.xMm + stepsX * step, zMm: piece.at.zMm + stepsZ * step };
         const by = formatLength(Math.hypot(stepsX, stepsZ) * step, style);
         take(movePiece(now(), piece.id, { ...piece.at, ...to }), `${piece.mark} moved ${by}`);
       },
       turn: (piece, byDeg) => {
+        if (!mayChange(piece)) return;
         const turnDeg = piece.at.turnDeg + byDeg;
         take(movePiece(now(), piece.id, { ...piece.at, turnDeg }), `${piece.mark} turned ${byDeg}°`);
       },
-      place: (piece, at) => take(movePiece(now(), piece.id, { ...piece.at, ...at }), `${piece.mark} moved`),
-      setFlag: (piece, flag, on) => {
-        const words = {
-          locked: ['unlocked', 'locked'],
-          accessible: ['no longer accessible', 'marked accessible'],
-        };
-        take(change(piece, { [flag]: on }), `${piece.mark} ${words[flag][on ? 1 : 0]}`);
+      place: (piece, at) => {
+        if (mayChange(piece)) take(movePiece(now(), piece.id, { ...piece.at, ...at }), `${piece.mark} moved`);
       },
+      setFlag: (piece, flag, on) =>
+        take(
+          change(piece, (old) => withFlag(old, flag, on)),
+          sayFlag(piece.mark, flag, on),
+        ),
       rename: (piece, name) => {
-        if (name.trim() !== piece.name) take(change(piece, { name: name.trim() }), `${piece.mark} renamed`);
+        if (name.trim() !== piece.name)
+          take(
+            change(piece, (old) => ({ ...old, name: name.trim() })),
+            `${piece.mark} renamed`,
+          );
       },
       seat: (piece, place, sitter) => {
         const who = sitter ? shortName(sitterName(sitter, cast)) : 'Nobody';

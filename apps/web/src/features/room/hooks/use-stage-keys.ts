@@ -1,5 +1,6 @@
 import type { Piece } from '@settlewright/geometry';
 import type { KeyboardEvent } from 'react';
+import type { Clipboard } from '../clipboard/use-clipboard.ts';
 import { useSurroundings } from '../room-context.tsx';
 import type { RoomAddress } from './use-address.ts';
 import type { Choosing } from './use-choosing.ts';
@@ -19,8 +20,9 @@ export function useStageKeys(options: {
   choosing: Choosing | undefined;
   /** What is done to several; left out while at most one is chosen. */
   group: { choosing: Choosing; actions: GroupActions } | undefined;
+  clipboard: Clipboard | undefined;
 }) {
-  const { piece, address, hand, actions, choosing, group } = options;
+  const { piece, address, hand, actions, choosing, group, clipboard } = options;
   const { canEdit } = useSurroundings();
 
   return (event: KeyboardEvent<HTMLElement>) => {
@@ -32,6 +34,16 @@ export function useStageKeys(options: {
     }
     if (event.key === 'a' && (event.ctrlKey || event.metaKey) && choosing) {
       choosing.chooseAll();
+      event.preventDefault();
+      return;
+    }
+    if ((event.ctrlKey || event.metaKey) && choosing && clipboard) {
+      const chosen = group ? group.choosing.pieces : piece ? [piece] : [];
+      // Words that are marked on the page are copied as words.
+      if (event.key === 'c' && chosen.length > 0 && getSelection()?.isCollapsed !== false)
+        clipboard.copy(chosen);
+      else if (event.key === 'v') clipboard.paste();
+      else return;
       event.preventDefault();
       return;
     }
@@ -51,9 +63,9 @@ export function useStageKeys(options: {
       else if (event.key === '.') group.actions.turn(pieces, -TURN_DEG);
       else if (event.key === 'Delete' || event.key === 'Backspace') group.actions.remove(pieces);
       else return;
-    } else if (move && !piece.locked) actions.nudge(piece, ...move);
-    else if (event.key === ',' && !piece.locked) actions.turn(piece, TURN_DEG);
-    else if (event.key === '.' && !piece.locked) actions.turn(piece, -TURN_DEG);
+    } else if (move) actions.nudge(piece, ...move);
+    else if (event.key === ',') actions.turn(piece, TURN_DEG);
+    else if (event.key === '.') actions.turn(piece, -TURN_DEG);
     else if (event.key === 'Delete' || event.key === 'Backspace') actions.remove(piece);
     else return;
     event.preventDefault();

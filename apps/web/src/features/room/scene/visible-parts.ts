@@ -2,6 +2,7 @@ import type { Part, Piece, SetDocument } from '@settlewright/geometry';
 import type { ViewLetter } from './views';
 
 function stands(piece: Piece, letter: ViewLetter): boolean {
+  if (piece.hidden) return false;
   if (letter === 'D') return piece.kind !== 'overhead';
   if (piece.kind !== 'bulkhead' || letter === 'C') return true;
   // A wall that turns its back to the viewer would hide the room behind it.
