@@ -3123,7 +3123,7 @@ export interface components {
         };
         DocumentChangeDto: {
             /** @enum {string} */
-            kind: "parameter" | "piece" | "seating" | "asked" | "known-difference" | "group";
+            kind: "parameter" | "piece" | "seating" | "asked" | "known-difference" | "group" | "view";
             pieceId?: string;
             mark?: string;
             /** @description path of the parameter in its piece */

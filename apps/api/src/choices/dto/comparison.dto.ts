@@ -70,7 +70,7 @@ export class ComparedVersionDto extends VersionStateDto {
 }
 
 export class DocumentChangeDto {
-  @ApiProperty({ enum: ['parameter', 'piece', 'seating', 'asked', 'known-difference', 'group'] })
+  @ApiProperty({ enum: ['parameter', 'piece', 'seating', 'asked', 'known-difference', 'group', 'view'] })
   kind: DocumentDifference['kind'];
   @ApiPropertyOptional()
   pieceId?: string;

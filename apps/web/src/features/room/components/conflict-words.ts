@@ -2,9 +2,11 @@ import type { FitSheet, RuleBook, VerdictOutcome } from '@settlewright/anthropom
 import {
   formatLength,
   LEAF_WORDS,
+  lensWords,
   parametersOf,
   type DocumentDifference,
   type LengthStyle,
+  type NamedView,
   type PieceGroup,
   type PieceOf,
   type SetDocument,
@@ -67,7 +69,13 @@ export function sayValue(difference: DocumentDifference, side: Side | 'base', wo
     const { pieces } = words.documents[side];
     return joinWords(pieces.filter(({ id }) => pieceIds.includes(id)).map(({ mark }) => mark));
   }
-  if (key === 'leaves') return sayLeaves(value as TableLeaves, words.style);
+  if (key === 'leaves') return sayLeaves(value, words.style);
+  if (kind === 'view') {
+    const { name, camera } = value as NamedView;
+    return camera.kind === 'lens'
+      ? `${name}, ${lensWords(camera, words.style)}`
+      : `${name}, view ${camera.letter}`;
+  }
   if (kind === 'seating' && isSitter(value)) return sitterName(value, words.cast);
   if (key === 'at' && typeof value === 'object') return 'moved';
   const piece = words.documents[side].pieces.find((candidate) => candidate.id === pieceId);

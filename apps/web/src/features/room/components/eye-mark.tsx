@@ -1,5 +1,4 @@
 import { classNames } from '@/components/class-names.ts';
-import type { ViewLetter } from '../scene/views.ts';
 
 /** Letter of a view in an eye: a drop whose tip points the way it looks. */
 export function EyeMark({
@@ -7,7 +6,7 @@ export function EyeMark({
   chosen,
   turnDeg = 0,
 }: {
-  letter: ViewLetter;
+  letter: string;
   chosen: boolean;
   turnDeg?: number;
 }) {

@@ -18,6 +18,7 @@ import { initials } from '@/lib/short-name.ts';
 import { sitterFill } from '@/lib/sitter-colours.ts';
 import { useSurroundings } from '../room-context.tsx';
 import { VIEW_LETTERS, VIEW_TITLES, type ViewLetter } from '../scene/views.ts';
+import { NamedViews } from '../views/named-views.tsx';
 import { EyeMark } from './eye-mark.tsx';
 
 const WIDTH = 240;
@@ -98,9 +99,9 @@ export function KeyPlan({ picture, address }: Props) {
       >
         Key plan
       </RuleHeading>
-      <RadioGroup
-        value={address.view}
-        onChange={address.show}
+      <RadioGroup<'div', ViewLetter | null>
+        value={address.throughNamed ? null : address.view}
+        onChange={(letter) => letter && address.show(letter)}
         aria-label="View"
         className="relative w-full"
         style={{ maxWidth: WIDTH, aspectRatio: `${WIDTH} / ${tall}` }}
@@ -137,7 +138,7 @@ export function KeyPlan({ picture, address }: Props) {
           <g transform={`translate(${x(0)} ${z(0)}) scale(${scale})`}>
             <DrawnShapes shapes={asked} />
           </g>
-          {cutX !== undefined && address.view === 'C' && (
+          {cutX !== undefined && address.view === 'C' && !address.throughNamed && (
             <path
               d={`M${cutX} 2V${height + 14}`}
               stroke="var(--color-ink)"
@@ -158,10 +159,15 @@ export function KeyPlan({ picture, address }: Props) {
               top: `${(eyes[letter].top / tall) * 100}%`,
             }}
           >
-            <EyeMark letter={letter} chosen={letter === address.view} turnDeg={eyes[letter].turn} />
+            <EyeMark
+              letter={letter}
+              chosen={!address.throughNamed && letter === address.view}
+              turnDeg={eyes[letter].turn}
+            />
           </Radio>
         ))}
       </RadioGroup>
+      <NamedViews picture={picture} address={address} />
     </section>
   );
 }

@@ -1,5 +1,5 @@
 import { tapeLines, type Piece } from '@settlewright/geometry';
-import { lazy, Suspense, useId, useMemo, useRef, useState } from 'react';
+import { lazy, Suspense, useId, useMemo, useRef } from 'react';
 import { LoadingLine } from '@/components/loading.tsx';
 import { useTheme } from '@/lib/theme.ts';
 import type { Clipboard } from '../clipboard/use-clipboard.ts';
@@ -15,8 +15,12 @@ import { Overlay } from '../overlay/overlay.tsx';
 import { tapesAtRest } from '../overlay/tape-words.ts';
 import type { RoomPicture } from '../picture.ts';
 import { useSurroundings } from '../room-context.tsx';
-import { isBehind, isToScale, VIEW_TITLES } from '../scene/views.ts';
+import { isBehind, isToScale } from '../scene/views.ts';
 import { useRoom } from '../store.ts';
+import { LensMask } from '../views/lens-mask.tsx';
+import { LensOnPlan } from '../views/lens-on-plan.tsx';
+import { useOfferPresentView, useSeen } from '../views/use-seen.ts';
+import { viewTitle } from '../views/view-title.ts';
 import { HiddenNote } from '../together/hidden-note.tsx';
 import { WayOnScene } from '../ways/way-on-scene.tsx';
 import { EyeMark } from './eye-mark.tsx';
@@ -54,11 +58,14 @@ export function SceneStage({ picture, piece, address, actions, several, onOpenCe
   const sheet = useRef<HTMLDivElement>(null);
   const readOut = useRef<HTMLDivElement>(null);
   const about = useId();
-  const [showBodies, setShowBodies] = useState(true);
-  const [showTapes, setShowTapes] = useState(true);
-  const { view: letter, clientView } = address;
+  const { clientView } = address;
+  const seen = useSeen(picture.document, address);
+  const { letter } = seen;
+  const [showBodies, showTapes] = [seen.bodies.shown, seen.tapes.shown];
   const settled = maker.picture(useRoom((state) => state.document));
-  const view = useView(settled, letter, address.pieceId, sheet);
+  const view = useView(settled, letter, address.pieceId, sheet, seen);
+  useOfferPresentView(seen, view, clientView);
+  const title = viewTitle(seen, style);
   const hand = useSceneHand({
     picture,
     view,
@@ -99,10 +106,10 @@ export function SceneStage({ picture, piece, address, actions, several, onOpenCe
   return (
     <section aria-label="Drawing of the set" className="flex min-h-0 flex-1 flex-col">
       <div className="flex min-h-9 items-center gap-3">
-        <EyeMark letter={letter} chosen />
+        <EyeMark letter={letter === 'lens' ? 'L' : letter} chosen />
         <div>
-          <p className="text-sm leading-4 font-medium">{VIEW_TITLES[letter]}</p>
-          <p className="text-xs text-ink-3">{isToScale(letter) ? 'to scale' : 'sizes on the tapes govern'}</p>
+          <p className="text-sm leading-4 font-medium">{title.name}</p>
+          <p className="text-xs text-ink-3">{title.about}</p>
         </div>
       </div>
       {picture.undrawn.length > 0 && (
@@ -116,7 +123,7 @@ export function SceneStage({ picture, piece, address, actions, several, onOpenCe
         ref={sheet}
         role="application"
         aria-roledescription="drawing"
-        aria-label={`${VIEW_TITLES[letter]}. ${
+        aria-label={`${title.name}. ${
           group
             ? `${joinWords(group.choosing.pieces.map(({ mark }) => mark))} chosen.`
             : piece
@@ -167,6 +174,10 @@ export function SceneStage({ picture, piece, address, actions, several, onOpenCe
           onOpenCell={onOpenCell}
         />
         <WayOnScene controller={view.controller} style={style} />
+        {view.lensBox && <LensMask box={view.lensBox} />}
+        {letter === 'D' && seen.lens && (
+          <LensOnPlan controller={view.controller} lens={seen.lens} style={style} />
+        )}
         <div
           ref={readOut}
           hidden
@@ -179,9 +190,9 @@ export function SceneStage({ picture, piece, address, actions, several, onOpenCe
         address={address}
         view={view}
         choosing={several?.choosing}
-        bodies={{ shown: showBodies, show: setShowBodies }}
+        bodies={seen.bodies}
         // Whoever sees verdicts alone may have none to show.
-        tapes={tapes.length > 0 && !clientView ? { shown: showTapes, show: setShowTapes } : undefined}
+        tapes={tapes.length > 0 && !clientView ? seen.tapes : undefined}
       />
       <TextTwin id={about} picture={picture} tapes={clientView ? [] : tapes} onOpenCell={onOpenCell} />
     </section>

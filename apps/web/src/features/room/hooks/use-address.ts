@@ -6,13 +6,20 @@ export interface RoomAddress {
   pieceId: string | undefined;
   /** Every chosen piece in the order it was chosen; the first is the selected one. */
   chosenIds: readonly string[];
+  /** The lettered view, where no named one is looked through. */
   view: ViewLetter;
+  /** The named view that is chosen in the list. */
+  namedId: string | undefined;
+  /** Whether the scene is seen through it; else it is only worked on, as a lens on the plan is. */
+  throughNamed: boolean;
   fitOpen: boolean;
   /** For showing to a client: no verdicts, no tapes. */
   clientView: boolean;
   select: (pieceId: string | undefined) => void;
   choose: (pieceIds: readonly string[]) => void;
   show: (view: ViewLetter) => void;
+  /** Looks through a named view and shows what it shows; without one, lets go of it. */
+  showNamed: (named: { id: string; clientView: boolean } | undefined) => void;
   openFit: (open: boolean) => void;
   setClientView: (on: boolean) => void;
 }
@@ -51,7 +58,25 @@ export function useRoomAddress(): RoomAddress {
       clientView: params.get('client') === 'yes',
       select: (pieceId) => choose(pieceId === undefined ? [] : [pieceId]),
       choose,
-      show: (letter) => change('view', letter === 'A' ? undefined : letter),
+      // Beside a named view every letter is said: none of them stands for looking through it.
+      show: (letter) => change('view', letter === 'A' && !params.has('named') ? undefined : letter),
+      namedId: params.get('named') ?? undefined,
+      throughNamed: params.has('named') && !params.has('view'),
+      showNamed: (named) =>
+        setParams(
+          (before) => {
+            const next = new URLSearchParams(before);
+            if (named === undefined) next.delete('named');
+            else {
+              next.set('named', named.id);
+              next.delete('view');
+              if (named.clientView) next.set('client', 'yes');
+              else next.delete('client');
+            }
+            return next;
+          },
+          { replace: true, preventScrollReset: true },
+        ),
       openFit: (open) => change('fit', open ? 'open' : undefined),
       setClientView: (on) => change('client', on ? 'yes' : undefined),
     };

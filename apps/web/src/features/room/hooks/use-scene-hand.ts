@@ -14,7 +14,7 @@ import { useSurroundings } from '../room-context.tsx';
 import { onLevel, pieceUnder } from '../scene/pick.ts';
 import { turn } from '../scene/vectors.ts';
 import { pixelsPerMm, rayThrough } from '../scene/view-frame.ts';
-import type { ViewLetter } from '../scene/views.ts';
+import type { SceneView } from '../scene/views.ts';
 import { visibleParts } from '../scene/visible-parts.ts';
 import { useRoomStore } from '../store.ts';
 import { adds, type Choosing } from './use-choosing.ts';
@@ -61,7 +61,7 @@ export type SceneHand = ReturnType<typeof useSceneHand>;
 export function useSceneHand(options: {
   picture: RoomPicture;
   view: View;
-  letter: ViewLetter;
+  letter: SceneView;
   selectedPieceId: string | undefined;
   onSelect: (pieceId: string | undefined) => void;
   choosing: Choosing | undefined;

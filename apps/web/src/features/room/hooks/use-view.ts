@@ -1,9 +1,12 @@
+import type { LetterCamera, NamedView } from '@settlewright/geometry';
 import { useEffect, useLayoutEffect, useMemo, useRef, useState, type RefObject } from 'react';
 import { flushSync } from 'react-dom';
 import type { RoomPicture } from '../picture.ts';
+import { union } from '../scene/bounds.ts';
 import { boundsToShow, cutThrough } from '../scene/focus.ts';
 import { createViewController, type ViewController } from '../scene/view-controller.ts';
-import { frameFor, type Cut, type Insets, type ViewLetter } from '../scene/views.ts';
+import { frameFor, type Cut, type Insets, type SceneView } from '../scene/views.ts';
+import { frameBox, lensFrame, type FrameBox } from '../views/lens-frame.ts';
 
 const WIDE: Insets = { top: 74, right: 40, bottom: 56, left: 96 };
 const NARROW: Insets = { top: 62, right: 14, bottom: 30, left: 14 };
@@ -12,17 +15,24 @@ const low = (height: number): Insets => ({ top: 54, right: 40, bottom: height * 
 const NARROW_PX = 560;
 const LOW_PX = 430;
 
+const insetsOf = ({ width, height }: { width: number; height: number }): Insets =>
+  width < NARROW_PX ? NARROW : height < LOW_PX ? low(height) : WIDE;
+
 export interface View {
   controller: ViewController;
   cut: Cut | undefined;
   narrow: boolean;
+  hand: Hand;
+  /** Where the frame of a lens lies on the sheet, when the room is seen through one. */
+  lensBox: FrameBox | undefined;
   zoomBy: (factor: number) => void;
   panBy: (dxPx: number, dyPx: number) => void;
   turnBy: (azimuth: number, elevation: number) => void;
   fit: () => void;
 }
 
-interface Hand {
+/** What the hand did to a lettered view. */
+export interface Hand {
   zoom: number;
   panMm: readonly [number, number];
   azimuth: number;
@@ -31,28 +41,41 @@ interface Hand {
 
 const START: Hand = { zoom: 1, panMm: [0, 0], azimuth: 0.62, elevation: 0.38 };
 
+const handOf = ({ zoom, panMm, azimuthDeg, elevationDeg }: LetterCamera): Hand => ({
+  zoom,
+  panMm,
+  azimuth: (azimuthDeg * Math.PI) / 180,
+  elevation: (elevationDeg * Math.PI) / 180,
+});
+
 /** The frame of the present view: letter, size of the sheet, zoom and pan put together. */
 export function useView(
   /** Of the committed document: the frame holds still while something is typed or dragged. */
   picture: RoomPicture,
-  letter: ViewLetter,
+  letter: SceneView,
   selectedPieceId: string | undefined,
   sheet: RefObject<HTMLElement | null>,
+  /** The named view that is looked through, and the lens that has to be seen on the plan. */
+  { named, lens }: { named: NamedView | undefined; lens: { id: string } | undefined },
 ): View {
   const [controller] = useState(createViewController);
   const [size, setSize] = useState({ width: 0, height: 0 });
   const [hand, setHand] = useState(START);
+  const camera = named?.camera;
   const narrow = size.width > 0 && size.width < NARROW_PX;
   const { document, parts } = picture;
   const piece = document.pieces.find((candidate) => candidate.id === selectedPieceId);
 
-  const bounds = useMemo(
-    () => boundsToShow(picture, selectedPieceId, narrow),
-    [picture, selectedPieceId, narrow],
-  );
+  const onPlan = letter === 'D' ? document.views?.find(({ id }) => id === lens?.id)?.camera : undefined;
+  const bounds = useMemo(() => {
+    const shown = boundsToShow(picture, selectedPieceId, narrow);
+    if (onPlan?.kind !== 'lens') return shown;
+    const at = [onPlan.at.xMm, 0, onPlan.at.zMm] as const;
+    return union(shown, { min: at, max: at });
+  }, [picture, selectedPieceId, narrow, onPlan]);
   const cut = useMemo(
-    () => (letter === 'C' ? cutThrough(piece ?? document.pieces[0], parts) : undefined),
-    [letter, piece, document, parts],
+    () => named?.section ?? (letter === 'C' ? cutThrough(piece ?? document.pieces[0], parts) : undefined),
+    [named, letter, piece, document, parts],
   );
 
   useLayoutEffect(() => {
@@ -69,24 +92,17 @@ export function useView(
     return () => observer.disconnect();
   }, [sheet]);
 
-  const last = useRef<{ letter: ViewLetter; zoom: number } | null>(null);
+  const last = useRef<{ letter: SceneView; zoom: number } | null>(null);
   useLayoutEffect(() => {
     if (size.width === 0) return;
     controller.resize(size);
     const move = last.current !== null && (last.current.letter !== letter || last.current.zoom !== hand.zoom);
     last.current = { letter, zoom: hand.zoom };
-    controller.show(
-      frameFor({
-        letter,
-        bounds,
-        viewport: size,
-        insets: narrow ? NARROW : size.height < LOW_PX ? low(size.height) : WIDE,
-        cut,
-        ...hand,
-      }),
-      move,
-    );
-  }, [controller, letter, bounds, size, narrow, cut, hand]);
+    const insets = insetsOf(size);
+    if (letter !== 'lens')
+      controller.show(frameFor({ letter, bounds, viewport: size, insets, cut, ...hand }), move);
+    else if (camera?.kind === 'lens') controller.show(lensFrame(camera, size, insets), move);
+  }, [controller, letter, bounds, size, cut, hand, camera]);
 
   useEffect(() => () => controller.stop(), [controller]);
 
@@ -95,11 +111,18 @@ export function useView(
     setShownLetter(letter);
     setHand((before) => ({ ...before, zoom: 1, panMm: [0, 0] }));
   }
+  const [shownCamera, setShownCamera] = useState<NamedView['camera']>();
+  if (shownCamera !== camera) {
+    setShownCamera(camera);
+    if (camera?.kind === 'letter') setHand(handOf(camera));
+  }
 
   return {
     controller,
     cut,
     narrow,
+    hand,
+    lensBox: camera?.kind === 'lens' && size.width > 0 ? frameBox(camera, size, insetsOf(size)) : undefined,
     zoomBy: (factor) =>
       setHand((before) => ({ ...before, zoom: Math.min(12, Math.max(0.4, before.zoom * factor)) })),
     panBy: (dxPx, dyPx) => {

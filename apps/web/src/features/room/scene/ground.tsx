@@ -2,13 +2,13 @@ import { useMemo } from 'react';
 import type { RoomPicture } from '../picture';
 import { boundsOf } from './bounds';
 import type { SceneMaterials } from './shaders';
-import type { ViewLetter } from './views';
+import type { SceneView } from './views';
 
 const MARGIN_MM = 900;
 
 interface Props {
   picture: RoomPicture;
-  letter: ViewLetter;
+  letter: SceneView;
   materials: SceneMaterials;
 }
 

@@ -32,8 +32,11 @@ function distanceTo(part: Part, ray: Ray): number | undefined {
   return near <= far && far > 0 ? Math.max(near, 0) : undefined;
 }
 
-/** The piece whose part the ray meets first. */
-export function pieceUnder(parts: readonly Part[], ray: Ray): string | undefined {
+/** The piece whose part the ray meets first, and how far away that is. */
+export function firstUnder(
+  parts: readonly Part[],
+  ray: Ray,
+): { pieceId: string; distanceMm: number } | undefined {
   let best = Infinity;
   let pieceId: string | undefined;
   for (const part of parts) {
@@ -43,8 +46,12 @@ export function pieceUnder(parts: readonly Part[], ray: Ray): string | undefined
       pieceId = part.pieceId;
     }
   }
-  return pieceId;
+  return pieceId === undefined ? undefined : { pieceId, distanceMm: best };
 }
+
+/** The piece whose part the ray meets first. */
+export const pieceUnder = (parts: readonly Part[], ray: Ray): string | undefined =>
+  firstUnder(parts, ray)?.pieceId;
 
 /** Where a ray meets a level plane; `undefined` when it runs level or away from it. */
 export function onLevel(ray: Ray, heightMm: number): { xMm: number; zMm: number } | undefined {

@@ -5,7 +5,7 @@ import { linesOf } from './ink-lines';
 import type { SceneMaterials } from './shaders';
 import { mergeParts, surfaceOf } from './solids';
 import { visibleParts } from './visible-parts';
-import type { ViewLetter } from './views';
+import type { SceneView } from './views';
 
 /** Frees what a memo made when it is made again. */
 export function useDispose(geometries: Record<string, BufferGeometry>) {
@@ -14,7 +14,7 @@ export function useDispose(geometries: Record<string, BufferGeometry>) {
 
 interface Props {
   picture: RoomPicture;
-  letter: ViewLetter;
+  letter: SceneView;
   chosenIds: readonly string[];
   materials: SceneMaterials;
 }

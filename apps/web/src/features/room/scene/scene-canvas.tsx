@@ -12,14 +12,14 @@ import { createMaterials, createSharedUniforms, type SharedUniforms } from './sh
 import type { ViewController } from './view-controller';
 import { add, scale, turn } from './vectors';
 import { projectionColumns, type ViewFrame } from './view-frame';
-import type { Cut, ViewLetter } from './views';
+import type { Cut, SceneView } from './views';
 
 const METRES = 0.001;
 
 export interface SceneProps {
   picture: RoomPicture;
   controller: ViewController;
-  letter: ViewLetter;
+  letter: SceneView;
   cut: Cut | undefined;
   chosenIds: readonly string[];
   showBodies: boolean;

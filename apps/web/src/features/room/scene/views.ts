@@ -7,16 +7,20 @@ import { onPlane, type ViewFrame, type Viewport } from './view-frame';
 export const VIEW_LETTERS = ['A', 'B', 'C', 'D', 'E'] as const;
 export type ViewLetter = (typeof VIEW_LETTERS)[number];
 
-export const VIEW_TITLES: Record<ViewLetter, string> = {
+/** What the scene can be seen through: a lettered view, or a lens that stands in the room. */
+export type SceneView = ViewLetter | 'lens';
+
+export const VIEW_TITLES: Record<SceneView, string> = {
   A: 'From the aisle',
   B: 'Along the room',
   C: 'A cut through the bench',
   D: 'From above',
   E: 'From the corner',
+  lens: 'Through a lens',
 };
 
 /** B, C and D are true to scale and carry a bar. */
-export const isToScale = (letter: ViewLetter): boolean => letter === 'B' || letter === 'C' || letter === 'D';
+export const isToScale = (letter: SceneView): boolean => letter === 'B' || letter === 'C' || letter === 'D';
 
 /** Standing place of the section: a point in the plane and the direction that looks out of it. */
 export interface Cut {

@@ -1,8 +1,10 @@
 import type { Part, Piece, SetDocument } from '@settlewright/geometry';
-import type { ViewLetter } from './views';
+import type { SceneView } from './views';
 
-function stands(piece: Piece, letter: ViewLetter): boolean {
+function stands(piece: Piece, letter: SceneView): boolean {
   if (piece.hidden) return false;
+  // A lens sees what a camera on that spot would.
+  if (letter === 'lens') return true;
   if (letter === 'D') return piece.kind !== 'overhead';
   if (piece.kind !== 'bulkhead' || letter === 'C') return true;
   // A wall that turns its back to the viewer would hide the room behind it.
@@ -12,7 +14,7 @@ function stands(piece: Piece, letter: ViewLetter): boolean {
 }
 
 /** Parts that are drawn in a view. */
-export function visibleParts(document: SetDocument, parts: readonly Part[], letter: ViewLetter): Part[] {
+export function visibleParts(document: SetDocument, parts: readonly Part[], letter: SceneView): Part[] {
   const hidden = new Set(document.pieces.filter((piece) => !stands(piece, letter)).map((piece) => piece.id));
   return parts.filter((part) => !hidden.has(part.pieceId));
 }
