@@ -1,5 +1,7 @@
 import {
   roomFor,
+  roomForPull,
+  type Handle,
   type LengthStyle,
   type Piece,
   type RoomFor,
@@ -13,12 +15,12 @@ const SAME_MM = 0.05;
 
 const known = new WeakMap<SetDocument, Map<string, RoomFor>>();
 
-/** The room that the other pieces leave to a number; worked out once for each document. */
-export function roomOf(document: SetDocument, pieceId: string, key: string): RoomFor {
+/** The room that the other pieces leave to a number, or to a handle; worked out once for each document. */
+export function roomOf(document: SetDocument, pieceId: string, key: string, handle?: Handle): RoomFor {
   const ofSet = known.get(document) ?? new Map<string, RoomFor>();
   known.set(document, ofSet);
-  const id = `${pieceId} ${key}`;
-  const room = ofSet.get(id) ?? roomFor(document, pieceId, key);
+  const id = handle?.id ?? `${pieceId} ${key}`;
+  const room = ofSet.get(id) ?? (handle ? roomForPull(document, handle) : roomFor(document, pieceId, key));
   ofSet.set(id, room);
   return room;
 }

@@ -1,4 +1,4 @@
-import { setParameter } from '@settlewright/geometry';
+import { setParameter, type RoomFor } from '@settlewright/geometry';
 import { Button } from '@/components/button.tsx';
 import { Measure } from '@/components/measure.tsx';
 import { inOtherUnits, showNumber, stepOf, type NumberParameter, type Reading } from '../numbers.ts';
@@ -15,16 +15,18 @@ interface Props {
   parameter: NumberParameter;
   reading: Reading;
   editing: boolean;
+  /** The room it has, where that is not the room of growing about the middle. */
+  room?: RoomFor;
   onTake: (value: number) => void;
 }
 
 /** What was read, in both units, and who minds; or what could not be read, with the ways out. */
-export function NumberSlip({ id, pieceId, parameter, reading, editing, onTake }: Props) {
+export function NumberSlip({ id, pieceId, parameter, reading, editing, room, onTake }: Props) {
   const { style } = useSurroundings();
   const document = useRoom((state) => state.document);
   const beyond =
     'value' in reading && pieceId !== undefined
-      ? beyondRoom(parameter, reading.value, roomOf(document, pieceId, parameter.key), style)
+      ? beyondRoom(parameter, reading.value, room ?? roomOf(document, pieceId, parameter.key), style)
       : undefined;
   const offered = (value: number): string => {
     const other = inOtherUnits(parameter, style, value);

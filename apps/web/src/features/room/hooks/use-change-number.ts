@@ -1,6 +1,8 @@
 import {
   parametersOf,
+  pullHandle,
   setParameter,
+  type Handle,
   type Piece,
   type RoomFor,
   type SetDocument,
@@ -22,11 +24,19 @@ export interface ChangeNumber {
   room: () => RoomFor;
 }
 
-/** Changes one number of one piece, by whatever control it is typed in. */
-export function useChangeNumber(pieceId: string, parameter: NumberParameter): ChangeNumber {
+/**
+ * Changes one number of one piece, by whatever control it is typed in. Pulled by a handle, the piece grows on that
+ * side alone.
+ */
+export function useChangeNumber(pieceId: string, parameter: NumberParameter, handle?: Handle): ChangeNumber {
   const store = useRoomStore();
   const { maker, engine, style } = useSurroundings();
   const { key } = parameter;
+  const changed = useCallback(
+    (document: SetDocument, value: number) =>
+      handle ? pullHandle(document, handle, value) : setParameter(document, pieceId, key, value),
+    [pieceId, key, handle],
+  );
 
   const preview = useCallback(
     (value: number | null) => {
@@ -35,10 +45,10 @@ export function useChangeNumber(pieceId: string, parameter: NumberParameter): Ch
         showPreview(null);
         return;
       }
-      const changed = setParameter(document, pieceId, key, value);
-      if (changed.ok) showPreview(changed.value);
+      const next = changed(document, value);
+      if (next.ok) showPreview(next.value);
     },
-    [store, pieceId, key],
+    [store, changed],
   );
 
   const commit = useCallback(
@@ -51,9 +61,9 @@ export function useChangeNumber(pieceId: string, parameter: NumberParameter): Ch
         showPreview(null);
         return undefined;
       }
-      const changed = setParameter(document, pieceId, key, value);
-      if (!changed.ok) return changed.error.message;
-      takeStep(document, changed.value, { ...before, value: before.value }, piece);
+      const next = changed(document, value);
+      if (!next.ok) return next.error.message;
+      takeStep(document, next.value, { ...before, value: before.value }, piece);
       return undefined;
 
       function takeStep(old: SetDocument, next: SetDocument, was: NumberParameter, piece: Piece) {
@@ -61,7 +71,7 @@ export function useChangeNumber(pieceId: string, parameter: NumberParameter): Ch
         const [from, to] = [showNumber(was, style), showNumber(was, style, value)];
         store.getState().commit(next, `${piece.mark} ${label} ${from} to ${to}`);
         const verdicts = changedVerdicts(maker.check(old), maker.check(next), engine.ruleBook);
-        const beyond = beyondRoom(was, value, roomOf(old, pieceId, key), style);
+        const beyond = beyondRoom(was, value, roomOf(old, pieceId, key, handle), style);
         const words = [
           `${was.label} ${sayNumber(was, style, value)}`,
           ...(beyond ? [sayLimit(was, beyond, piece, style)] : []),
@@ -70,10 +80,13 @@ export function useChangeNumber(pieceId: string, parameter: NumberParameter): Ch
         announce(`${words.join('. ')}.`);
       }
     },
-    [store, pieceId, key, maker, engine, style],
+    [store, pieceId, key, handle, changed, maker, engine, style],
   );
 
-  const room = useCallback(() => roomOf(store.getState().document, pieceId, key), [store, pieceId, key]);
+  const room = useCallback(
+    () => roomOf(store.getState().document, pieceId, key, handle),
+    [store, pieceId, key, handle],
+  );
 
   return { preview, commit, room };
 }

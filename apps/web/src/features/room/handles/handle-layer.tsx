@@ -1,0 +1,91 @@
+import { pieceHandles, type Piece } from '@settlewright/geometry';
+import { useCallback, useEffect, useLayoutEffect, useMemo, useRef } from 'react';
+import type { ViewController } from '../scene/view-controller.ts';
+import { isBehind, type Cut } from '../scene/views.ts';
+import { useRoom } from '../store.ts';
+import { HandleGrip } from './handle-grip.tsx';
+import { placeHandles, type Box } from './handle-layout.ts';
+
+interface Props {
+  /** The selected piece as it is shown just now. */
+  piece: Piece;
+  controller: ViewController;
+  cut: Cut | undefined;
+  /** On a narrow sheet only the numbers of the first sentence have room. */
+  narrow: boolean;
+}
+
+/** Handles of the selected piece over the picture. React makes them; the view moves them. */
+export default function HandleLayer({ piece, controller, cut, narrow }: Props) {
+  const layer = useRef<HTMLDivElement>(null);
+  const inHand = useRef<string>(undefined);
+  const committed = useRoom((state) => state.document.pieces.find(({ id }) => id === piece.id));
+  const handles = useMemo(
+    () => (committed ? pieceHandles(committed).filter(({ main }) => main || !narrow) : []),
+    [committed, narrow],
+  );
+  const shown = useMemo(() => pieceHandles(piece).filter(({ atMm }) => isBehind(atMm, cut)), [piece, cut]);
+
+  const layOut = useCallback(() => {
+    const frame = controller.frame();
+    const root = layer.current;
+    if (!frame || !root) return;
+    const elements = [...root.querySelectorAll<HTMLElement>('[data-handle]')];
+    const known = new Set(elements.map(({ dataset }) => dataset.handle));
+    const placed = placeHandles(
+      frame,
+      controller.viewport(),
+      shown.filter(({ id }) => known.has(id)),
+      labelsOn(root),
+      inHand.current,
+    );
+    for (const element of elements) {
+      const at = placed.get(element.dataset.handle ?? '');
+      element.style.setProperty('visibility', at ? 'visible' : 'hidden');
+      if (!at) continue;
+      element.style.setProperty('transform', `translate(${at.x}px, ${at.y}px) translate(-50%, -50%)`);
+      element
+        .querySelector('[data-arrow]')
+        ?.setAttribute('transform', `rotate(${((at.angleRad * 180) / Math.PI).toFixed(1)})`);
+    }
+  }, [controller, shown]);
+
+  useLayoutEffect(layOut);
+  useEffect(() => controller.subscribe(layOut), [controller, layOut]);
+
+  const onHand = useCallback((handleId: string | undefined) => {
+    inHand.current = handleId;
+  }, []);
+
+  if (!committed) return null;
+  return (
+    <div ref={layer} data-handles className="pointer-events-none absolute inset-0">
+      {handles.map((handle) => (
+        <HandleGrip
+          key={handle.id}
+          piece={committed}
+          handle={handle}
+          controller={controller}
+          onHand={onHand}
+        />
+      ))}
+    </div>
+  );
+}
+
+/** Where flags and names stand on the sheet just now. */
+function labelsOn(root: HTMLElement): Box[] {
+  const sheet = root.getBoundingClientRect();
+  const labels = root.parentElement?.querySelectorAll<HTMLElement>('[data-flag], [data-name]') ?? [];
+  return [...labels]
+    .filter(({ style }) => style.visibility !== 'hidden')
+    .map((label) => {
+      const box = label.getBoundingClientRect();
+      return {
+        left: box.left - sheet.left,
+        right: box.right - sheet.left,
+        top: box.top - sheet.top,
+        bottom: box.bottom - sheet.top,
+      };
+    });
+}
