@@ -14,6 +14,7 @@ import {
 } from './drawn.ts';
 import { boxAround, type Box } from './page-box.ts';
 import type { PageArc } from './line-tracks.ts';
+import { pinnedLines } from './pinned-lines.ts';
 import { seenLines } from './seen-lines.ts';
 import { setDimensions } from './set-dimensions.ts';
 import { pieceMarks } from './set-marks.ts';
@@ -73,7 +74,8 @@ function byPiece(document: SetDocument, parts: readonly Part[]): PieceParts[] {
  */
 export function setDrawing(document: SetDocument, view: SetView, style: LengthStyle): SetDrawing {
   const overhead = new Set(document.pieces.filter(({ kind }) => kind === 'overhead').map(({ id }) => id));
-  const seen = seenLines(deriveParts(document), view, (id) => overhead.has(id));
+  const parts = deriveParts(document);
+  const seen = seenLines(parts, view, (id) => overhead.has(id));
   const lines = seen.lines.map(({ from, to, what }): DrawnLine => ({
     from,
     to,
@@ -91,10 +93,11 @@ export function setDrawing(document: SetDocument, view: SetView, style: LengthSt
   const sheet = { view, style, letterMm, box: setBoundsMm };
   const dimensions = setDimensions(pieces, sheet);
   const marks = pieceMarks(pieces, sheet);
+  const pinned = pinnedLines(document, parts, sheet, [...dimensions.words, ...marks.words]);
   const title = viewWords(view, style);
   const low = Math.max(
     setBoundsMm.y + setBoundsMm.height,
-    ...[...dimensions.words, ...marks.words].map(({ at }) => at[1] + letterMm),
+    ...[...dimensions.words, ...marks.words, ...pinned.words].map(({ at }) => at[1] + letterMm),
     ...dimensions.lines.flatMap(({ from, to }) => [from[1], to[1]]),
   );
   const bar = barScale(title, [setBoundsMm.x, low + 2.5 * letterMm], sheet);
@@ -103,9 +106,9 @@ export function setDrawing(document: SetDocument, view: SetView, style: LengthSt
     view,
     setBoundsMm,
     faces: seen.faces.map(({ points, part }) => ({ points, material: part.material, pieceId: part.pieceId })),
-    lines: [...lines, ...dimensions.lines, ...marks.lines, ...bar.lines],
+    lines: [...lines, ...dimensions.lines, ...marks.lines, ...pinned.lines, ...bar.lines],
     arcs,
-    words: [...dimensions.words, ...marks.words, ...bar.words],
+    words: [...dimensions.words, ...marks.words, ...pinned.words, ...bar.words],
   };
   const boundsMm = boxAround([
     ...all.lines.flatMap(({ from, to }) => [from, to]),

@@ -6,7 +6,7 @@ import { isSame, leavesOf } from './leaves.ts';
 export interface DocumentDifference {
   /** Stable while the three versions stay the same. */
   id: string;
-  kind: 'parameter' | 'piece' | 'seating' | 'asked' | 'known-difference' | 'group' | 'view';
+  kind: 'parameter' | 'piece' | 'seating' | 'asked' | 'known-difference' | 'group' | 'view' | 'dimension';
   pieceId?: string;
   mark?: string;
   /** Path of the parameter in its piece. */
@@ -69,6 +69,7 @@ export function diffDocuments(
     ...noteDifferences(base, mine, theirs),
     ...groupDifferences(base, mine, theirs),
     ...viewDifferences(base, mine, theirs),
+    ...dimensionDifferences(base, mine, theirs),
   ];
 }
 
@@ -252,5 +253,33 @@ function viewDifferences(
       values,
       base !== null,
     );
+  });
+}
+
+function dimensionDifferences(
+  base: SetDocument | null,
+  mine: SetDocument,
+  theirs: SetDocument,
+): DocumentDifference[] {
+  const find = (document: SetDocument | null, id: string) =>
+    document?.dimensions?.find((dimension) => dimension.id === id);
+  const ids = new Set([theirs, mine].flatMap(({ dimensions = [] }) => dimensions.map(({ id }) => id)));
+  return [...ids].flatMap((id) => {
+    const values = { base: find(base, id), mine: find(mine, id), theirs: find(theirs, id) };
+    const { mine: own, theirs: other } = values;
+    const marks = (own ?? other)?.ends.map(
+      ({ pieceId }) =>
+        [...mine.pieces, ...theirs.pieces].find((piece) => piece.id === pieceId)?.mark ?? pieceId,
+    );
+    const named: Named = {
+      id: `dimension:${id}`,
+      kind: 'dimension',
+      key: id,
+      label: `Dimension line from ${marks?.[0]} to ${marks?.[1]}`,
+    };
+    // Two lines pinned on both sides under one id are two lines: both are kept.
+    const bothAdded = base !== null && values.base === undefined && own !== undefined && other !== undefined;
+    if (!bothAdded) return compared(named, values, base !== null);
+    return isSame(own, other) ? [] : [{ ...named, ...values, changedBy: 'both', conflict: false }];
   });
 }

@@ -1,5 +1,6 @@
 import { TAPE_MEASURE_KEYS } from '@settlewright/anthropometry';
 import { z } from 'zod';
+import { dimensionSchema, MAX_DIMENSIONS } from '../measuring/dimension.ts';
 import { MAX_VIEWS, namedViewSchema } from '../views/named-view.ts';
 import { postureChoiceSchema } from './posture-choice.ts';
 
@@ -247,6 +248,8 @@ export const setDocumentSchema = z.strictObject({
     .optional(),
   /** Views that somebody gave a name to, in the order they were kept. */
   views: z.array(namedViewSchema).max(MAX_VIEWS).optional(),
+  /** Dimension lines that stay with the set, between pieces or from a piece to whoever sits at a place. */
+  dimensions: z.array(dimensionSchema).max(MAX_DIMENSIONS).optional(),
 });
 
 export type SetDocument = z.infer<typeof setDocumentSchema>;

@@ -2,6 +2,7 @@ import { definitionOf, kindTitle } from '../pieces/kinds.ts';
 import { normalTurnDeg, toRoom } from '../parts/placement.ts';
 import { footprint } from './footprint.ts';
 import type { Piece, PieceKind, SetDocument } from './document.ts';
+import { withoutLostDimensions } from '../measuring/edit-dimensions.ts';
 import { withoutLostMembers } from './groups.ts';
 import { withoutLostSeats } from './seating.ts';
 
@@ -80,7 +81,7 @@ export function addPiece(
 export function removePiece(document: SetDocument, pieceId: string): SetDocument {
   const pieces = document.pieces.filter((piece) => piece.id !== pieceId || piece.locked);
   if (pieces.length === document.pieces.length) return document;
-  return withoutLostMembers(withoutLostSeats({ ...document, pieces }));
+  return withoutLostDimensions(withoutLostMembers(withoutLostSeats({ ...document, pieces })));
 }
 
 /**

@@ -1,5 +1,7 @@
 import { fail, ok, type Result } from '../units/result.ts';
 import { diffDocuments, type DocumentDifference } from './diff-documents.ts';
+import type { PinnedDimension } from '../measuring/dimension.ts';
+import { pinDimension, withDimensions, withoutLostDimensions } from '../measuring/edit-dimensions.ts';
 import type { Piece, PieceGroup, SetDocument, SitterRef } from './document.ts';
 import type { NamedView } from '../views/named-view.ts';
 import { freeId, nextMark } from './edit-pieces.ts';
@@ -101,6 +103,8 @@ function withMine(merged: SetDocument, difference: DocumentDifference): SetDocum
       return withMyGroup(merged, key, mine as PieceGroup | undefined);
     case 'view':
       return withMyView(merged, key, mine as NamedView | undefined);
+    case 'dimension':
+      return withMyDimension(merged, difference);
   }
 }
 
@@ -125,6 +129,17 @@ function withMyView(
   const others = views.flatMap((view) => (view.id !== id ? [view] : mine === undefined ? [] : [mine]));
   const all = mine === undefined || isThere ? others : [...others, mine];
   return all.length === 0 ? merged : { ...merged, views: all };
+}
+
+/** A line pinned on both sides under one id is kept twice, mine under the next free one. */
+function withMyDimension(
+  merged: SetDocument,
+  { key, mine, changedBy, conflict }: DocumentDifference,
+): SetDocument {
+  const own = mine as PinnedDimension | undefined;
+  if (own && changedBy === 'both' && !conflict) return pinDimension(merged, own.ends).document;
+  const others = merged.dimensions?.filter(({ id }) => id !== key) ?? [];
+  return withDimensions(merged, own === undefined ? others : [...others, own]);
 }
 
 /** Whoever sits there now; how they sit stays unless that differs as well. */
@@ -184,6 +199,6 @@ function withEveryoneOnce(merged: SetDocument, mine: SetDocument): Pick<Merge, '
     seen.add(sitter.castId);
     return !again;
   });
-  const document = withoutLostMembers(withoutLostSeats({ ...merged, seating: once }));
+  const document = withoutLostDimensions(withoutLostMembers(withoutLostSeats({ ...merged, seating: once })));
   return { document, unseated: merged.seating.filter((seat) => !document.seating.includes(seat)) };
 }

@@ -116,6 +116,15 @@ function meaningErrors(document: SetDocument): DocumentFieldError[] {
   });
   const views = new Set<string>();
   document.views?.forEach(({ id }, i) => unique(views, id, `views.${i}.id`, `Two views have the id “${id}”`));
+  const lines = new Set<string>();
+  document.dimensions?.forEach(({ id, ends }, i) => {
+    unique(lines, id, `dimensions.${i}.id`, `Two dimension lines have the id “${id}”`);
+    const lost = ends.find(({ pieceId }) => !ids.has(pieceId));
+    if (lost !== undefined) {
+      const message = `The dimension line “${id}” hangs on a piece “${lost.pieceId}” that is not in the set`;
+      errors.push({ path: `dimensions.${i}.ends`, code: 'no-such-piece', message });
+    }
+  });
   if (errors.length > 0) return errors;
   document.seating.forEach((seat, i) => {
     const where = `${seat.pieceId}:${seat.place}`;
