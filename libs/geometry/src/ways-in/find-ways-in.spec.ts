@@ -203,6 +203,37 @@ describe('height bands', () => {
   });
 });
 
+describe('a way past fewer people', () => {
+  it('is offered beside the widest one', () => {
+    // Two gaps lead to the stool: the wide one past somebody's knees, the narrow one past nobody.
+    const set = setOf([
+      piece('loose-seat', 'L1', [0, 0, 0], { backHeightMm: 0 }),
+      piece('loose-seat', 'L2', [1250, 950, -90], { backHeightMm: 0 }),
+      ...wallsAlong([
+        [400, 1200],
+        [-800, 1200],
+      ]),
+      ...wallsAlong(
+        [
+          [-1150, 1200],
+          [-1300, 1200],
+          [-1300, -1100],
+          [1300, -1100],
+          [1300, 1200],
+          [1000, 1200],
+        ],
+        'V',
+      ),
+    ]);
+    const { ways } = waysIn(set);
+    const stool = ways.find(({ placeId }) => placeId === 'l1:1');
+    expect(stool?.past).toEqual([]);
+    expect(stool?.freer).toMatchObject({ past: [], insteadOf: ['l2:1'] });
+    expect(stool?.freer?.tightest?.clearMm).toBeLessThan(stool?.tightest?.clearMm ?? 150);
+    expect(stool?.freer?.tightest?.clearMm).toBeCloseTo((350 - 255) / 2, 0);
+  });
+});
+
 describe('the order in which to sit', () => {
   it('is innermost first where one slides', () => {
     const { ways, order } = waysIn(arrangement('facing-benches'));
@@ -260,6 +291,63 @@ describe('tables and chairs', () => {
     const found = way({ ...open, pieces: [...open.pieces, bar] }, 'l1:1');
     expect(found.chairs).toEqual([{ pieceId: 'l2', mark: 'L2' }]);
     expect(found.passes).toBe(true);
+  });
+
+  it('drops the leaf that bars the only way, unless nothing may be moved', () => {
+    const open = roomWithGap(600, 0);
+    // The leaf reaches across the gap; hanging, it leaves 600 - 60 - 30 of it.
+    const table = piece('table', 'T1', [-340, 1300, 0], {
+      lengthMm: 200,
+      widthMm: 300,
+      heightMm: 740,
+      topThicknessMm: 30,
+      leaves: { right: { widthMm: 480, down: false } },
+    });
+    const set = {
+      ...open,
+      pieces: [
+        ...open.pieces,
+        table,
+        ...wallsAlong(
+          [
+            [-240, 1500],
+            [-240, 1200],
+          ],
+          'V',
+        ),
+        ...wallsAlong(
+          [
+            [300, 1200],
+            [300, 1500],
+          ],
+          'U',
+        ),
+      ],
+    };
+    const found = way(set, 'l1:1');
+    expect(found).toMatchObject({
+      passes: true,
+      leaves: [{ pieceId: 't1', mark: 'T1', edge: 'right', down: true }],
+      chairs: [],
+    });
+    const kept = findWaysIn(set, everyone(set).slice(0, 1), [200, 1200], { chairs: false, leaves: false });
+    expect(kept.ways[0]).toMatchObject({ passes: false, leaves: [] });
+  });
+
+  it('starts at the entrance where the set has one, whatever the route', () => {
+    const set = roomWithGap(400);
+    const asked = {
+      ...set.asked,
+      entrance: { xMm: -2200, zMm: 2200 },
+      route: [
+        { xMm: 2200, zMm: 2200 },
+        { xMm: 0, zMm: 1500 },
+      ],
+    };
+    const found = way({ ...set, asked }, 'l1:1');
+    const [first] = found.steps[0]?.poses ?? [];
+    expect(found.from).toBe('entrance');
+    expect(Math.hypot((first?.xMm ?? 0) + 2200, (first?.zMm ?? 0) - 2200)).toBeLessThan(80);
   });
 
   it('starts at the start of the route where the set keeps one', () => {

@@ -59,7 +59,7 @@ export function walkIn(
   const bands = standing(walker, heights);
   const body = among(bands, obstacles);
   const clearAt = (pose: Pose): number => clearanceAt(body, pose);
-  const entrance = document.asked.route?.[0];
+  const entrance = document.asked.entrance ?? document.asked.route?.[0];
   const lattice = latticeAround(document, place, entrance && [entrance.xMm, entrance.zMm]);
   const starts = startsAt(place, slideLines(found, place, walker, obstacles, heights[0]), lattice).filter(
     ({ clearMm }) => clearMm >= leastMm,

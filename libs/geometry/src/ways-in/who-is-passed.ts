@@ -5,7 +5,7 @@ import type { Convex } from './convex.ts';
 import type { Obstacle } from './obstacles.ts';
 import type { WalkedIn } from './walk-in.ts';
 import type { BodyHeights, Walker } from './walker.ts';
-import type { WayIn } from './way-in.ts';
+import type { FreerWay, WayIn } from './way-in.ts';
 
 /** Somebody else of the set, at a place. */
 interface Other {
@@ -20,33 +20,52 @@ interface Other {
  * @param others - everybody else
  * @param heights - what is stepped over and what is leaned under
  * @param round - looks for another way, wide enough, with these bodies in the room
- * @returns those passed, and whether standing up is enough
+ * @returns those passed, and whether standing up is enough; with a narrower way that leads past fewer, where there is one
  */
 export function whoIsPassed(
   walked: WalkedIn,
   others: readonly Other[],
   heights: BodyHeights,
   round: (bodies: readonly Obstacle[]) => WalkedIn | undefined,
-): WayIn['past'] {
+): Pick<WayIn, 'past' | 'freer'> {
   const all = others.map((other) => ({ ...other, bodies: seatedAt(other.place, other.comer, heights) }));
   const inWayOf = (one: WalkedIn) =>
     all.filter(({ place, bodies }) => one.over.includes(place.frame.placeId) || one.touches(bodies));
   const inWay = inWayOf(walked);
-  if (inWay.length === 0) return [];
+  if (inWay.length === 0) return { past: [] };
   const answer = (how: 'stands-up' | 'sits-later') =>
     inWay.map(({ place }) => ({ placeId: place.frame.placeId, how }));
   // Who does not get through an empty room is not asked to look for another way.
-  if (walked.clearMm < 0) return answer('sits-later');
+  if (walked.clearMm < 0) return { past: answer('sits-later') };
   const seatedRound = round(inWay.flatMap(({ bodies }) => bodies));
-  if (seatedRound && inWayOf(seatedRound).length === 0) return [];
-  if (!inWay.every((other) => canStandUp(other, walked.obstacles, heights))) return answer('sits-later');
+  const freer = seatedRound && freerWay(seatedRound, inWay, inWayOf(seatedRound));
+  const found = freer ? { freer } : {};
+  if (freer?.past.length === 0) return { past: [], freer };
+  if (!inWay.every((other) => canStandUp(other, walked.obstacles, heights))) {
+    return { past: answer('sits-later'), ...found };
+  }
   const stoodRound = round(inWay.flatMap(({ place, comer }) => stoodUpAt(place, comer, heights)));
   const stillInWay = stoodRound
     ? inWayOf(stoodRound).filter(
         (other) => !inWay.includes(other) || stoodRound.over.includes(other.place.frame.placeId),
       )
     : inWay;
-  return answer(stillInWay.length === 0 ? 'stands-up' : 'sits-later');
+  return { past: answer(stillInWay.length === 0 ? 'stands-up' : 'sits-later'), ...found };
+}
+
+function freerWay(
+  round: WalkedIn,
+  inWay: readonly Other[],
+  stillInWay: readonly Other[],
+): FreerWay | undefined {
+  if (stillInWay.length >= inWay.length) return undefined;
+  const idsOf = (others: readonly Other[]) => others.map(({ place }) => place.frame.placeId);
+  return {
+    steps: round.steps,
+    ...(round.tightest ? { tightest: round.tightest } : {}),
+    past: idsOf(stillInWay),
+    insteadOf: idsOf(inWay),
+  };
 }
 
 /** Whether there is room for the legs between the seat and what stands before it. */
