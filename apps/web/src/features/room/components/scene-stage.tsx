@@ -39,6 +39,7 @@ const FADE = {
 const NOTHING: readonly string[] = [];
 
 const SceneCanvas = lazy(() => import('../scene/scene-canvas.tsx'));
+const HandleLayer = lazy(() => import('../handles/handle-layer.tsx'));
 
 interface Props {
   picture: RoomPicture;
@@ -52,7 +53,7 @@ interface Props {
 
 /** The drawing, what stands over it and what can be done to it. */
 export function SceneStage({ picture, piece, address, actions, several, onOpenCell }: Props) {
-  const { style, maker } = useSurroundings();
+  const { style, canEdit, maker } = useSurroundings();
   const theme = useTheme((state) => state.choice);
   const lit = useRoom((state) => state.litCellId);
   const sheet = useRef<HTMLDivElement>(null);
@@ -173,6 +174,17 @@ export function SceneStage({ picture, piece, address, actions, several, onOpenCe
           onSelectPiece={address.select}
           onOpenCell={onOpenCell}
         />
+        {canEdit && !clientView && piece && !group && (
+          <Suspense fallback={null}>
+            <HandleLayer
+              key={piece.id}
+              piece={piece}
+              controller={view.controller}
+              cut={view.cut}
+              narrow={view.narrow}
+            />
+          </Suspense>
+        )}
         <WayOnScene controller={view.controller} style={style} />
         {view.lensBox && <LensMask box={view.lensBox} />}
         {letter === 'D' && seen.lens && (
