@@ -17,6 +17,12 @@ export function dayWords(iso: string | undefined | null): string {
   return date.getFullYear() === new Date().getFullYear() ? DAY.format(date) : DAY_AND_YEAR.format(date);
 }
 
+/** "2 December 2026", always with the year: what is printed is read in other years. */
+export function dateWords(iso: string): string {
+  const date = read(iso);
+  return date === undefined ? '' : DAY_AND_YEAR.format(date);
+}
+
 /** "2 December 2026", as a paper that is kept says when it was made. */
 export const todayWords = (): string => DAY_AND_YEAR.format(new Date());
 

@@ -20,6 +20,8 @@ export interface RoomSurroundings {
   maker: PictureMaker;
   /** When the workshop last changed the probability that verdicts ask for, if it ever did. */
   confidenceSetAt?: string | null;
+  /** Set where an issued revision is looked at instead of the draft. */
+  issued?: { letter: string; issuedAt: string };
 }
 
 export const RoomContext = createContext<RoomSurroundings | null>(null);

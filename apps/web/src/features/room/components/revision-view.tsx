@@ -11,6 +11,7 @@ import { sayProblem } from '@/lib/problem.ts';
 import { useUnitStyle } from '@/lib/unit-choice.ts';
 import { setAddress, useCast, useRevision, type FullRevision, type SetPath } from '../api.ts';
 import { loadFitEngine } from '../engine.ts';
+import { SaveDrawingButton } from '../export/save-drawing-button.tsx';
 import { useRoomAddress } from '../hooks/use-address.ts';
 import { usePieceActions } from '../hooks/use-piece-actions.ts';
 import { createPictureMaker } from '../picture.ts';
@@ -54,6 +55,7 @@ function Frozen({ path, setName, revision }: { path: SetPath; setName: string; r
             cast: cast.data,
             engine: engine.data,
             maker: createPictureMaker(engine.data, cast.data, { server: revision.fitSheet }),
+            issued: { letter: revision.letter, issuedAt: revision.issuedAt },
           }
         : undefined,
     [path, setName, style, revision, engine.data, cast.data],
@@ -143,6 +145,9 @@ function FrozenRoom() {
           actions={actions}
         />
         <KeyPlan picture={picture} address={address} />
+        <p>
+          <SaveDrawingButton />
+        </p>
         {document.knownDifferences.length > 0 && (
           <section>
             <RuleHeading>Known differences</RuleHeading>

@@ -4,7 +4,8 @@ import { inflateSync } from 'node:zlib';
 import { ARRANGEMENTS, type PieceOf, type SetView } from '@settlewright/geometry';
 import { setDrawing } from '@settlewright/geometry/export';
 import { describe, expect, it } from 'vitest';
-import { pdfOf, printable, sheetsOf } from './pdf-sheets.ts';
+import { pdfOf, sheetsOf } from './pdf-sheets.ts';
+import { printable, unprinted } from './sheet-frame.ts';
 
 const style = { system: 'feet-inches', roundTo: 16 } as const;
 const { resolve } = createRequire(import.meta.url);
@@ -59,5 +60,6 @@ describe('printed sheets', () => {
   it('keep letters that the font has and mark those it lacks', () => {
     expect(printable('Café 17½″, 1¹¹⁄₁₆″ − 457\u202fmm')).toBe('Café 17½″, 1¹¹⁄₁₆″ − 457\u00a0mm');
     expect(printable('食堂車')).toBe('···');
+    expect(unprinted(['Вагон', 'Café 3′\u202f8″'])).toEqual(['В', 'а', 'г', 'о', 'н']);
   });
 });

@@ -14,14 +14,19 @@ import { Notice } from '@/components/notice.tsx';
 import { entryOf, type QuantityEntry } from '@/components/quantity-entry.ts';
 import { Select } from '@/components/select.tsx';
 import { announce } from '@/lib/announce.ts';
-import { todayWords } from '@/lib/dates.ts';
+import { dateWords, todayWords } from '@/lib/dates.ts';
 import { keepFile } from '@/lib/download.ts';
 import { Toggle } from '../components/toggle.tsx';
 import { usePicture, useSurroundings } from '../room-context.tsx';
 import { readPalette } from '../scene/palette.ts';
-import { freeSpace, pdfOf, sheetsOf, type PaperKey } from './pdf-sheets.ts';
+import { shotSize } from '../views/view-shot.tsx';
+import { useShots } from '../views/use-shots.tsx';
+import { aboutView } from '../views/view-title.ts';
+import { pdfOf, sheetsOf } from './pdf-sheets.ts';
+import { freeSpace, unprinted, type PaperKey } from './sheet-frame.ts';
+import { pdfOfViews } from './view-sheets.ts';
 import { loadSheetFonts } from './sheet-fonts.ts';
-import { takeStill } from './still.ts';
+import { pngOf, takeStill } from './still.ts';
 import { CUT_WORDS, fileName, usualCut, usualScale, VIEW_CHOICES, viewName } from './views-to-save.ts';
 
 const FILES = [
@@ -53,10 +58,19 @@ const scalesOf = (system: LengthStyle['system']) =>
     .filter((scale) => scale <= 200)
     .map((value) => ({ value, words: scaleWords(system, value) }));
 
+/** What a picture or sheet shows when no named view is chosen, and what all of them are called. */
+const NONE = '';
+const ALL = 'all';
+const WIDTHS = [1280, 1920, 2560, 3840].map((value) => ({ value, words: `${value} pixels wide` }));
+const PRINT_PX = 2400;
+
 /** Saves a plan, an elevation, a section, the scene or its model as a file; all of it is made in the browser. */
 export default function SaveDrawing({ onClose }: { onClose: () => void }) {
-  const { setName, style } = useSurroundings();
-  const { document: set, parts } = usePicture();
+  const { setName, style, issued } = useSurroundings();
+  const picture = usePicture();
+  const { document: set, parts } = picture;
+  const { shoot, stage } = useShots(picture);
+  const named = set.views ?? [];
   const [kind, setKind] = useState<FileKind>('pdf');
   const [direction, setDirection] = useState<ViewDirection>('above');
   const [isCut, setIsCut] = useState(false);
@@ -64,10 +78,17 @@ export default function SaveDrawing({ onClose }: { onClose: () => void }) {
   const [dashed, setDashed] = useState(false);
   const [scale, setScale] = useState(() => usualScale(style.system));
   const [paper, setPaper] = useState<PaperKey>(style.system === 'millimetres' ? 'a4' : 'letter');
+  const [namedId, setNamedId] = useState(NONE);
+  const [widthPx, setWidthPx] = useState(1920);
   const [busy, setBusy] = useState(false);
   const [problem, setProblem] = useState<string | null>(null);
 
-  const isDrawing = kind !== 'png' && kind !== 'glb';
+  const shown = kind === 'pdf' || kind === 'png' ? namedId : NONE;
+  const shots = named.filter(({ id }) => shown === ALL || id === shown);
+  const isDrawing = kind !== 'png' && kind !== 'glb' && shots.length === 0;
+  const version = issued
+    ? `Revision ${issued.letter}, issued ${dateWords(issued.issuedAt)}`
+    : `Draft, ${todayWords()}`;
   const sectionMm = isCut ? (cut.value ?? undefined) : undefined;
   const view = useMemo(
     (): SetView => ({ direction, sectionMm, hidden: dashed ? 'dashed' : 'left-out', scale }),
@@ -79,7 +100,7 @@ export default function SaveDrawing({ onClose }: { onClose: () => void }) {
     () => `data:image/svg+xml,${encodeURIComponent(svgOf(drawing, title))}`,
     [drawing, title],
   );
-  const sheets = kind === 'pdf' ? sheetsOf(drawing, paper).length : 0;
+  const sheets = kind !== 'pdf' ? 0 : isDrawing ? sheetsOf(drawing, paper).length : shots.length;
 
   async function contents(): Promise<BlobPart> {
     switch (kind) {
@@ -88,13 +109,33 @@ export default function SaveDrawing({ onClose }: { onClose: () => void }) {
       case 'dxf':
         return dxfOf(drawing, style.system === 'millimetres' ? 'millimetres' : 'inches');
       case 'pdf': {
-        const version = `Draft, ${todayWords()}`;
-        return pdfOf(drawing, { setName, version, style }, paper, await loadSheetFonts());
+        const words = { setName, version, style };
+        const texts = [
+          setName,
+          ...(isDrawing ? drawing.words : []).map(({ text }) => text),
+          ...shots.map(({ name }) => name),
+        ];
+        const lost = unprinted(texts);
+        if (lost.length > 0) {
+          throw new Error(
+            `The letters of a printed sheet are Latin ones; ${lost.map((letter) => `“${letter}”`).join(', ')} cannot be printed. Write the name in Latin letters, or save an SVG picture.`,
+          );
+        }
+        const fonts = await loadSheetFonts();
+        if (isDrawing) return pdfOf(drawing, words, paper, fonts);
+        const pictures = [];
+        for (const one of shots) {
+          const canvas = await shoot({ view: one, width: PRINT_PX, ground: '#ffffff', forPaper: true });
+          pictures.push({ name: one.name, about: aboutView(one, style), picture: canvas });
+        }
+        return pdfOfViews(pictures, words, paper, fonts);
       }
       case 'png': {
-        const still = await takeStill(
-          getComputedStyle(document.documentElement).getPropertyValue('--color-paper'),
-        );
+        const ground = getComputedStyle(document.documentElement).getPropertyValue('--color-paper');
+        const [one] = shots;
+        const still = one
+          ? await pngOf(await shoot({ view: one, width: widthPx, ground, forPaper: false }))
+          : await takeStill(ground);
         if (!still) throw new Error('The scene is not drawn at the moment, so there is no picture of it.');
         return still;
       }
@@ -109,7 +150,8 @@ export default function SaveDrawing({ onClose }: { onClose: () => void }) {
     setBusy(true);
     setProblem(null);
     try {
-      const name = fileName(isDrawing ? [setName, viewName(view)] : [setName], kind);
+      const what = isDrawing ? [viewName(view)] : shown === ALL ? ['views'] : shots.map((one) => one.name);
+      const name = fileName([setName, ...(issued ? [`revision ${issued.letter}`] : []), ...what], kind);
       keepFile(new Blob([await contents()], { type: TYPES[kind] }), name);
       announce(`${name} is saved.`);
     } catch (error) {
@@ -134,7 +176,33 @@ export default function SaveDrawing({ onClose }: { onClose: () => void }) {
       )}
       <div className="grid gap-x-8 gap-y-5 tablet:grid-cols-[17rem_minmax(0,1fr)]">
         <div className="grid content-start gap-4">
-          <Select label="File" value={kind} options={FILES} onChange={setKind} />
+          <Select
+            label="File"
+            value={kind}
+            options={FILES}
+            onChange={(next) => {
+              setKind(next);
+              if (namedId === ALL) setNamedId(NONE);
+            }}
+          />
+          {named.length > 0 && (kind === 'pdf' || kind === 'png') && (
+            <Select
+              label="Named view"
+              value={namedId}
+              options={[
+                {
+                  value: NONE,
+                  words: kind === 'pdf' ? 'None, a drawing to scale' : 'None, the scene as it stands',
+                },
+                ...named.map(({ id, name }) => ({ value: id, words: name })),
+                ...(kind === 'pdf' ? [{ value: ALL, words: 'All named views, a sheet each' }] : []),
+              ]}
+              onChange={setNamedId}
+            />
+          )}
+          {kind === 'png' && shots[0] && (
+            <Select label="Size" value={widthPx} options={WIDTHS} onChange={setWidthPx} />
+          )}
           {isDrawing && (
             <>
               <Select
@@ -175,9 +243,11 @@ export default function SaveDrawing({ onClose }: { onClose: () => void }) {
             <Select label="Paper" value={paper} options={PAPER_CHOICES} onChange={setPaper} />
           )}
           <p className="text-sm text-ink-2" role="status">
-            {kind === 'pdf' && sheetWords(sheets, paper)}
+            {kind === 'pdf' && (isDrawing ? sheetWords(sheets, paper) : viewSheetWords(shots.length, paper))}
             {kind === 'dxf' && `Full size, in ${style.system === 'millimetres' ? 'millimetres' : 'inches'}.`}
+            {kind === 'png' && shots[0] && pixelWords(shotSize(shots[0], widthPx))}
             {kind === 'png' &&
+              !shots[0] &&
               'The scene as it stands on the screen, with the bodies shown there; no tapes, no names.'}
             {kind === 'glb' && 'In metres, without bodies.'}
           </p>
@@ -197,6 +267,7 @@ export default function SaveDrawing({ onClose }: { onClose: () => void }) {
             <Button onClick={onClose}>Close</Button>
           </div>
         </div>
+        {stage}
         {isDrawing && (
           <img
             src={preview}
@@ -221,3 +292,9 @@ function sheetWords(sheets: number, paper: PaperKey): string {
   }
   return `${sheets} sheets of ${name}, each showing ${Math.round(widthMm)} by ${Math.round(heightMm)} mm of paper. The scale is kept; they overlap for joining.`;
 }
+
+const viewSheetWords = (sheets: number, paper: PaperKey): string =>
+  `${sheets === 1 ? 'One sheet' : `${sheets} sheets`} of ${paper === 'a4' ? 'A4' : 'Letter'}, a view on each; not to scale.`;
+
+const pixelWords = ({ width, height }: { width: number; height: number }): string =>
+  `${width} × ${height} pixels, the exact frame of the view; no tapes, no names.`;

@@ -1,7 +1,7 @@
 import regular from '@expo-google-fonts/work-sans/400Regular/WorkSans_400Regular.ttf?url';
 import semibold from '@expo-google-fonts/work-sans/600SemiBold/WorkSans_600SemiBold.ttf?url';
 import { fontDataUrl } from '@/lib/font-data.ts';
-import type { SheetFonts } from './pdf-sheets.ts';
+import type { SheetFonts } from './sheet-frame.ts';
 
 const base64 = async (address: string): Promise<string> => (await fontDataUrl(address)).split(',')[1] ?? '';
 

@@ -1,5 +1,5 @@
 /** Draws the scene now and gives its canvas, to be copied before the browser clears it. */
-type Taker = () => HTMLCanvasElement;
+export type Taker = () => HTMLCanvasElement;
 
 let taker: Taker | null = null;
 
@@ -14,7 +14,12 @@ export function offerStill(next: Taker): () => void {
 /** The scene as it stands on the screen, on the ground of its page; nothing when no scene is drawn. */
 export async function takeStill(ground: string): Promise<Blob | null> {
   const canvas = taker?.();
-  if (!canvas) return null;
+  const copy = canvas && onGround(canvas, ground);
+  return copy ? pngOf(copy) : null;
+}
+
+/** A copy of a picture before the browser clears it, on the ground of its page. */
+export function onGround(canvas: HTMLCanvasElement, ground: string): HTMLCanvasElement | null {
   const copy = document.createElement('canvas');
   copy.width = canvas.width;
   copy.height = canvas.height;
@@ -23,5 +28,9 @@ export async function takeStill(ground: string): Promise<Blob | null> {
   pen.fillStyle = ground;
   pen.fillRect(0, 0, copy.width, copy.height);
   pen.drawImage(canvas, 0, 0);
-  return new Promise((resolve) => copy.toBlob(resolve, 'image/png'));
+  return copy;
 }
+
+/** A picture as a file. */
+export const pngOf = (canvas: HTMLCanvasElement): Promise<Blob | null> =>
+  new Promise((resolve) => canvas.toBlob(resolve, 'image/png'));

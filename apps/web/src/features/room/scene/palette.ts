@@ -32,6 +32,19 @@ function channels(hex: string): Vector3 {
     : new Vector3((value >> 16) / 255, ((value >> 8) & 255) / 255, (value & 255) / 255);
 }
 
+/** The tokens of the light theme, for what goes on paper: asked and put back before anything is painted. */
+export function readPaperPalette(element: Element): Palette {
+  const root = document.documentElement;
+  const { theme } = root.dataset;
+  root.dataset.theme = 'light';
+  try {
+    return readPalette(element);
+  } finally {
+    if (theme === undefined) delete root.dataset.theme;
+    else root.dataset.theme = theme;
+  }
+}
+
 /** Reads the tokens of the theme in force: the picture has no colours of its own. */
 export function readPalette(element: Element): Palette {
   const style = getComputedStyle(element);

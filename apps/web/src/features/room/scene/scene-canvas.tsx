@@ -1,13 +1,13 @@
 import { Canvas, useFrame, useThree } from '@react-three/fiber';
 import { useEffect, useLayoutEffect, useMemo, useRef } from 'react';
 import { OrthographicCamera } from 'three';
-import { offerStill } from '../export/still';
+import { offerStill, type Taker } from '../export/still';
 import type { RoomPicture } from '../picture';
 import { BodyFigures } from './body-figures';
 import { followView } from './follow-view';
 import { Ground } from './ground';
 import { PieceSolids } from './piece-solids';
-import { readPalette } from './palette';
+import { readPalette, readPaperPalette } from './palette';
 import { createMaterials, createSharedUniforms, type SharedUniforms } from './shaders';
 import type { ViewController } from './view-controller';
 import { add, scale, turn } from './vectors';
@@ -27,6 +27,12 @@ export interface SceneProps {
   theme: string;
   /** Receives the figures of the last picture, for tests and for the curious. */
   report: (figures: { calls: number; triangles: number }) => void;
+  /** Who may copy the picture; the answer takes the offer back. Usually whoever saves what stands on the screen. */
+  offer?: (taker: Taker) => () => void;
+  /** For paper: the colours of the light theme. */
+  forPaper?: boolean;
+  /** Pixels of the picture for one of the page; as the screen has it when absent. */
+  pixelRatio?: number;
 }
 
 const inMetres = (frame: ViewFrame): ViewFrame => ({
@@ -58,14 +64,28 @@ function aim(camera: OrthographicCamera, frame: ViewFrame, aspect: number) {
   camera.projectionMatrixInverse.copy(camera.projectionMatrix).invert();
 }
 
-function Stage({ picture, controller, letter, cut, chosenIds, showBodies, theme, report }: SceneProps) {
+function Stage({
+  picture,
+  controller,
+  letter,
+  cut,
+  chosenIds,
+  showBodies,
+  theme,
+  report,
+  offer = offerStill,
+  forPaper = false,
+}: SceneProps) {
   const camera = useMemo(() => new OrthographicCamera(), []);
   const shared = useMemo(() => createSharedUniforms(), []);
   const materials = useMemo(() => createMaterials(shared), [shared]);
   const { advance, invalidate, get, gl } = useThree();
   const canvas = gl.domElement;
   // The theme is read from the tokens, which React does not see change.
-  const palette = useMemo(() => ({ ...readPalette(canvas), theme }), [canvas, theme]);
+  const palette = useMemo(
+    () => ({ ...(forPaper ? readPaperPalette(canvas) : readPalette(canvas)), theme }),
+    [canvas, forPaper, theme],
+  );
 
   useEffect(() => {
     palette.tones.forEach((tone, n) => shared.uTones.value[n]?.copy(tone));
@@ -89,11 +109,11 @@ function Stage({ picture, controller, letter, cut, chosenIds, showBodies, theme,
   useLayoutEffect(() => followView(controller, get), [controller, get]);
   useEffect(
     () =>
-      offerStill(() => {
+      offer(() => {
         advance(performance.now());
         return canvas;
       }),
-    [advance, canvas],
+    [advance, canvas, offer],
   );
   useEffect(() => invalidate(), [picture, letter, chosenIds, showBodies, invalidate]);
   useEffect(
@@ -133,7 +153,7 @@ export default function SceneCanvas(props: SceneProps) {
   return (
     <Canvas
       frameloop="demand"
-      dpr={[1, 2]}
+      dpr={props.pixelRatio ?? [1, 2]}
       gl={{ antialias: true, alpha: true, stencil: true }}
       resize={{ scroll: false, debounce: 0 }}
       style={{ position: 'absolute', inset: 0, pointerEvents: 'none' }}
