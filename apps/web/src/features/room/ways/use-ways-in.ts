@@ -1,5 +1,5 @@
 import { ruleNumber } from '@settlewright/anthropometry';
-import type { Comer, SetDocument, WaysIn } from '@settlewright/geometry';
+import type { Comer, MayMove, SetDocument, WaysIn } from '@settlewright/geometry';
 import { useEffect, useMemo, useState } from 'react';
 import { faultWords } from '@/lib/ask-worker.ts';
 import { useSurroundings } from '../room-context.tsx';
@@ -22,7 +22,7 @@ export interface WaysFound {
 }
 
 /** The ways in of everybody whose measures this reader may see; looked for again when the set changes. */
-export function useWaysIn(document: SetDocument): WaysFound {
+export function useWaysIn(document: SetDocument, mayMove: MayMove): WaysFound {
   const { engine, cast } = useSurroundings();
   const { model, ruleBook } = engine;
   const heightsMm = useMemo(() => {
@@ -47,17 +47,22 @@ export function useWaysIn(document: SetDocument): WaysFound {
       .filter(({ pieceId, place }) => !counted.has(`${pieceId}:${place}`))
       .map(({ sitter }) => sitterName(sitter, cast));
   }, [document, cast, comers]);
-  const [answer, setAnswer] = useState<{ to: typeof comers; found?: WaysIn; fault?: string }>();
+  const [answer, setAnswer] = useState<{
+    to: typeof comers;
+    moving: MayMove;
+    found?: WaysIn;
+    fault?: string;
+  }>();
   useEffect(() => {
     let wanted = true;
-    askWays({ document, comers, heightsMm }, () => wanted).then(
-      (found) => wanted && found && setAnswer({ to: comers, found }),
-      (fault: unknown) => wanted && setAnswer({ to: comers, fault: faultWords(fault) }),
+    askWays({ document, comers, heightsMm, mayMove }, () => wanted).then(
+      (found) => wanted && found && setAnswer({ to: comers, moving: mayMove, found }),
+      (fault: unknown) => wanted && setAnswer({ to: comers, moving: mayMove, fault: faultWords(fault) }),
     );
     return () => {
       wanted = false;
     };
-  }, [document, comers, heightsMm]);
-  const current = answer?.to === comers ? answer : undefined;
+  }, [document, comers, heightsMm, mayMove]);
+  const current = answer?.to === comers && answer.moving === mayMove ? answer : undefined;
   return { comers, leftOut, heightsMm, found: current?.found, fault: current?.fault };
 }

@@ -3,6 +3,7 @@ import { useCallback, useEffect, useLayoutEffect, useRef } from 'react';
 import { Measure } from '@/components/measure.tsx';
 import type { ViewController } from '../scene/view-controller.ts';
 import { project } from '../scene/view-frame.ts';
+import { FloorOnScene } from './floor-on-scene.tsx';
 import { useShownWay } from './shown-way.ts';
 
 /** Just off the floor, where feet go. */
@@ -10,7 +11,7 @@ const FLOOR_MM = 5;
 
 /** The chosen way in over the drawing: its line on the floor, and a flag where it is tightest. */
 export function WayOnScene({ controller, style }: { controller: ViewController; style: LengthStyle }) {
-  const way = useShownWay((state) => state.way);
+  const { way, floor } = useShownWay();
   const line = useRef<SVGPathElement>(null);
   const flag = useRef<HTMLDivElement>(null);
   const layOut = useCallback(() => {
@@ -31,13 +32,18 @@ export function WayOnScene({ controller, style }: { controller: ViewController; 
   }, [controller, way]);
   useLayoutEffect(layOut);
   useEffect(() => controller.subscribe(layOut), [controller, layOut]);
-  if (!way) return null;
+  if (!way && floor.length === 0) return null;
   return (
-    <div aria-hidden="true" className="pointer-events-none absolute inset-0 overflow-hidden" data-way-in>
+    <div
+      aria-hidden="true"
+      className="pointer-events-none absolute inset-0 overflow-hidden"
+      data-way-in={way ? '' : undefined}
+    >
+      {floor.length > 0 && <FloorOnScene controller={controller} floor={floor} />}
       <svg className="absolute inset-0 size-full" fill="none">
         <path ref={line} className="stroke-chalk" strokeWidth="2.5" strokeDasharray="7 4" />
       </svg>
-      {way.tightest && (
+      {way?.tightest && (
         <div
           ref={flag}
           className={`absolute top-0 left-0 rounded-sm border bg-sheet px-1.5 text-sm leading-6 whitespace-nowrap ${way.passes ? 'border-ink' : 'border-wont text-wont'}`}

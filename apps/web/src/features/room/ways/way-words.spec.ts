@@ -23,6 +23,7 @@ const way: WayIn = {
   tightest: tight,
   passes: true,
   chairs: [],
+  leaves: [],
   past: [],
 };
 
@@ -45,6 +46,15 @@ describe('a way in', () => {
     expect(sayHelp({ ...way, past, chairs: [{ pieceId: 'l1', mark: 'L1' }] }, naming)).toEqual([
       'Goes in before Ben.',
       'Take L1 out of the way.',
+    ]);
+  });
+
+  it('says which leaf to drop, and which narrower way leads past nobody', () => {
+    const leaves = [{ pieceId: 't1', mark: 'T1', edge: 'left' as const, down: true }];
+    const freer = { steps: way.steps, tightest: tight, past: [], insteadOf: ['b1:2'] };
+    expect(sayHelp({ ...way, leaves, freer }, naming)).toEqual([
+      'Drop the left leaf of T1.',
+      'The widest way leads past Ben once seated. Or past nobody, 300 mm at the tightest.',
     ]);
   });
 });

@@ -1,4 +1,4 @@
-import type { TightSpot, WayIn } from '@settlewright/geometry';
+import { LEAF_WORDS, type FreerWay, type TightSpot, type WayIn } from '@settlewright/geometry';
 import { joinWords } from '../choosing-words.ts';
 
 /** How lengths and people are called. */
@@ -34,7 +34,7 @@ export function sayWay({ steps, tightest, passes, placeId }: WayIn, { length, na
 }
 
 /** What others have to do for it. */
-export function sayHelp({ past, chairs }: WayIn, { name }: Naming): string[] {
+export function sayHelp({ past, chairs, leaves, freer }: WayIn, { name, length }: Naming): string[] {
   const of = (how: WayIn['past'][number]['how']) =>
     past.filter((one) => one.how === how).map(({ placeId }) => name(placeId));
   const [later, up] = [of('sits-later'), of('stands-up')];
@@ -42,7 +42,16 @@ export function sayHelp({ past, chairs }: WayIn, { name }: Naming): string[] {
     ...(later.length > 0 ? [`Goes in before ${joinWords(later)}.`] : []),
     ...(up.length > 0 ? [`Past ${joinWords(up)} once seated only where they stand up.`] : []),
     ...(chairs.length > 0 ? [`Take ${joinWords(chairs.map(({ mark }) => mark))} out of the way.`] : []),
+    ...leaves.map(({ mark, edge, down }) => `${down ? 'Drop' : 'Lift'} the ${LEAF_WORDS[edge]} of ${mark}.`),
+    ...(freer ? [sayFreer(freer, { name, length })] : []),
   ];
+}
+
+/** "Or past nobody, 14½″ at the tightest." */
+export function sayFreer({ past, insteadOf, tightest }: FreerWay, { name, length }: Naming): string {
+  const whom = past.length === 0 ? 'nobody' : `${joinWords(past.map(name))} alone`;
+  const room = tightest ? `${length(tightest.widthMm)} at the tightest` : 'with room to spare';
+  return `The widest way leads past ${joinWords(insteadOf.map(name))} once seated. Or past ${whom}, ${room}.`;
 }
 
 /** Of whom nothing is known here: neither how they get in nor whether others get past them. */

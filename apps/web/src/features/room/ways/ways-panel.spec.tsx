@@ -17,8 +17,8 @@ import { WaysPanel } from './ways-panel.tsx';
 /** A worker that answers in this thread: a test has no other. */
 class NearWorker {
   onmessage?: (event: { data: unknown }) => void;
-  postMessage({ id, document, comers, heightsMm }: WaysQuestion) {
-    const answer = findWaysIn(document, comers, heightsMm);
+  postMessage({ id, document, comers, heightsMm, mayMove }: WaysQuestion) {
+    const answer = findWaysIn(document, comers, heightsMm, mayMove);
     queueMicrotask(() => this.onmessage?.({ data: { id, answer } }));
   }
   terminate = () => undefined;
@@ -112,5 +112,20 @@ describe('ways in', () => {
     const user = open(empty);
     await user.click(screen.getByRole('button', { name: 'Show ways in' }));
     expect(screen.getByText(/Seat somebody/)).toBeVisible();
+  });
+
+  it('start where people come in, once that is said, as one step', async () => {
+    const user = open(seated());
+    await user.click(screen.getByRole('button', { name: 'Show ways in' }));
+    expect(screen.getByText('From open floor beside the set; no entrance is set.')).toBeVisible();
+    await user.type(screen.getByRole('textbox', { name: 'To the right' }), '2000 mm');
+    await user.type(screen.getByRole('textbox', { name: 'To the front' }), '2500 mm');
+    await user.click(screen.getByRole('button', { name: 'Set the entrance' }));
+    expect(screen.getByText('At the spot marked on the plan.')).toBeVisible();
+    await screen.findAllByText(/gets in|is stuck/);
+    const [first] = useShownWay.getState().way?.steps[0]?.poses ?? [];
+    expect(Math.hypot((first?.xMm ?? 0) - 2000, (first?.zMm ?? 0) - 2500)).toBeLessThan(80);
+    await user.click(screen.getByRole('button', { name: 'No entrance' }));
+    expect(screen.getByText('From open floor beside the set; no entrance is set.')).toBeVisible();
   });
 });

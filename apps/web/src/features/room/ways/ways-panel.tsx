@@ -1,11 +1,20 @@
-import { formatLength, wheelchairFloor, type SetDocument } from '@settlewright/geometry';
+import {
+  formatLength,
+  leavesOfTable,
+  wheelchairFloor,
+  type MayMove,
+  type SetDocument,
+} from '@settlewright/geometry';
 import { useEffect, useMemo, useState } from 'react';
 import { Button } from '@/components/button.tsx';
 import { RuleHeading } from '@/components/rule-heading.tsx';
 import { Select } from '@/components/select.tsx';
+import { Toggle } from '../components/toggle.tsx';
+import { useTakeStep } from '../hooks/use-take-step.ts';
 import { useSurroundings } from '../room-context.tsx';
 import { useRoom } from '../store.ts';
-import { sayFloor } from './floor-words.ts';
+import { EntranceFields, withEntrance } from './entrance-fields.tsx';
+import { sayFloor, sayFloorSources } from './floor-words.ts';
 import { showWay } from './shown-way.ts';
 import { useWalk } from './use-walk.ts';
 import { useWaysIn } from './use-ways-in.ts';
@@ -37,24 +46,35 @@ export function WaysPanel() {
 }
 
 function Ways({ document }: { document: SetDocument }) {
-  const { engine, style } = useSurroundings();
-  const { comers, leftOut, heightsMm, found, fault } = useWaysIn(document);
+  const { engine, style, canEdit } = useSurroundings();
+  const take = useTakeStep();
+  const [mayMove, setMayMove] = useState<MayMove>({ chairs: true, leaves: true });
+  const { comers, leftOut, heightsMm, found, fault } = useWaysIn(document, mayMove);
   const [chosen, setChosen] = useState<string>();
-  const way = found?.ways.find(({ placeId }) => placeId === chosen) ?? found?.ways[0];
+  const [narrow, setNarrow] = useState(false);
+  const widest = found?.ways.find(({ placeId }) => placeId === chosen) ?? found?.ways[0];
+  const way = useMemo(
+    () => (narrow && widest?.freer ? { ...widest, ...widest.freer, past: [] } : widest),
+    [narrow, widest],
+  );
   const comer = comers.find(({ placeId }) => placeId === way?.placeId);
   const poses = useMemo(() => way?.steps.flatMap((step) => step.poses) ?? NO_POSES, [way]);
   const walk = useWalk(poses);
   const still = matchMedia('(prefers-reduced-motion: reduce)').matches;
   const floor = useMemo(() => wheelchairFloor(document, engine.ruleBook), [document, engine]);
   useEffect(() => {
-    showWay(way);
+    showWay(way, floor);
     return () => showWay(undefined);
-  }, [way]);
+  }, [way, floor]);
   const length = (mm: number) => formatLength(mm, style);
   const naming = {
     length,
     name: (placeId: string) => comers.find((one) => one.placeId === placeId)?.name ?? 'whoever sits there',
   };
+  const kinds = new Set(document.pieces.map(({ kind }) => kind));
+  const hasLeaves = document.pieces.some(
+    (piece) => piece.kind === 'table' && leavesOfTable(piece).length > 0,
+  );
   const stuck = found?.ways.filter(({ passes }) => !passes) ?? [];
 
   return (
@@ -75,36 +95,53 @@ function Ways({ document }: { document: SetDocument }) {
           onChange={setChosen}
         />
       )}
-      {(way ?? floor.length > 0) && (
-        <WayPlan
-          document={document}
-          way={way}
-          comer={comer}
-          heightsMm={heightsMm}
-          floor={floor}
-          walker={walk.pose}
-        />
-      )}
+      <WayPlan
+        document={document}
+        way={way}
+        comer={comer}
+        heightsMm={heightsMm}
+        floor={floor}
+        walker={walk.pose}
+        {...(canEdit && {
+          onEntrance: (spot) =>
+            take(withEntrance(document, spot), document.asked.entrance ? 'Entrance moved' : 'Entrance set'),
+        })}
+      />
       {way && (
         <>
           <div aria-live="polite">
             <p>{sayWay(way, naming)}</p>
-            {sayHelp(way, naming).map((words) => (
-              <p key={words}>{words}</p>
-            ))}
+            {widest && sayHelp(widest, naming).map((words) => <p key={words}>{words}</p>)}
           </div>
+          {widest?.freer && (
+            <Toggle on={narrow} onChange={setNarrow}>
+              Draw the way past {widest.freer.past.length === 0 ? 'nobody' : 'fewer people'}
+            </Toggle>
+          )}
           {!still && poses.length > 1 && (
             <Button size="small" onClick={walk.pose ? walk.stop : walk.start}>
               {walk.pose ? 'Stop the walk' : 'Walk the way'}
             </Button>
           )}
           <p className="text-ink-3">
-            {way.from === 'route'
-              ? 'From the start of the route.'
-              : 'From open floor beside the set; no route is kept.'}{' '}
             Bodies as broad and deep as measured or estimated, in their clothes. Guidance: no check reads it.
           </p>
         </>
+      )}
+      <EntranceFields document={document} />
+      {(kinds.has('loose-seat') || hasLeaves) && (
+        <div role="group" aria-label="What may be moved for somebody who is stuck">
+          {kinds.has('loose-seat') && (
+            <Toggle on={mayMove.chairs} onChange={(chairs) => setMayMove({ ...mayMove, chairs })}>
+              Chairs may be taken out
+            </Toggle>
+          )}
+          {hasLeaves && (
+            <Toggle on={mayMove.leaves} onChange={(leaves) => setMayMove({ ...mayMove, leaves })}>
+              Leaves may be lifted or dropped
+            </Toggle>
+          )}
+        </div>
       )}
       {stuck.length > 0 && (
         <div>
@@ -137,6 +174,7 @@ function Ways({ document }: { document: SetDocument }) {
               <li key={`${shape.kind}-${n}`}>{sayFloor(shape, length)}</li>
             ))}
           </ul>
+          <p className="text-ink-3">Sizes: {sayFloorSources(floor, engine.ruleBook).join('; ')}.</p>
         </div>
       )}
     </div>

@@ -1,4 +1,4 @@
-import { findWaysIn, type Comer, type SetDocument } from '@settlewright/geometry';
+import { findWaysIn, type Comer, type MayMove, type SetDocument } from '@settlewright/geometry';
 import { replyTo } from '@/lib/ask-worker.ts';
 
 export interface WaysQuestion {
@@ -6,8 +6,11 @@ export interface WaysQuestion {
   document: SetDocument;
   comers: readonly Comer[];
   heightsMm: readonly [steppedOver: number, leanedUnder: number];
+  mayMove?: MayMove;
 }
 
-self.onmessage = ({ data: { id, document, comers, heightsMm } }: MessageEvent<WaysQuestion>) => {
-  void replyTo(id, () => findWaysIn(document, comers, heightsMm)).then((reply) => self.postMessage(reply));
+self.onmessage = ({ data: { id, document, comers, heightsMm, mayMove } }: MessageEvent<WaysQuestion>) => {
+  void replyTo(id, () => findWaysIn(document, comers, heightsMm, mayMove)).then((reply) =>
+    self.postMessage(reply),
+  );
 };
