@@ -9,6 +9,7 @@ const GROUPS: { title: string; keys: [keys: string, does: string][] }[] = [
       ['Ctrl Z', 'undo the last step'],
       ['Ctrl Shift Z', 'redo it'],
       ['F', 'open or close the fit sheet'],
+      ['T', 'take the tape, or put it away'],
       ['A B C D E', 'go to that view'],
       ['?', 'this list'],
     ],

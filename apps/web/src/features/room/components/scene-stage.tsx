@@ -22,6 +22,9 @@ import { LensOnPlan } from '../views/lens-on-plan.tsx';
 import { useOfferPresentView, useSeen } from '../views/use-seen.ts';
 import { viewTitle } from '../views/view-title.ts';
 import { HiddenNote } from '../together/hidden-note.tsx';
+import { TapeBar } from '../tape-tool/tape-bar.tsx';
+import { linesOnScene, useMeasures, useMeasuringScene } from '../tape-tool/use-measuring.ts';
+import { useTapeHand } from '../tape-tool/use-tape-hand.ts';
 import { WayOnScene } from '../ways/way-on-scene.tsx';
 import { EyeMark } from './eye-mark.tsx';
 import { SceneErrorBoundary } from './scene-error-boundary.tsx';
@@ -94,6 +97,11 @@ export function SceneStage({ picture, piece, address, actions, several, onOpenCe
       : [];
   const bodies = showBodies ? picture.bodies.filter((body) => isBehind(body.crownMm, view.cut)) : [];
 
+  const measuring = useMeasuringScene(picture);
+  const measures = useMeasures(picture, measuring);
+  const tapeHand = useTapeHand({ picture, scene: measuring, view, letter, showBodies, readOut });
+  const measured = showTapes && !clientView ? linesOnScene(measures) : [];
+
   const keys = useStageKeys({
     piece,
     address,
@@ -141,7 +149,7 @@ export function SceneStage({ picture, piece, address, actions, several, onOpenCe
         onWheel={(event) => {
           if (event.ctrlKey) view.zoomBy(event.deltaY < 0 ? 1.1 : 1 / 1.1);
         }}
-        {...hand.handlers}
+        {...(clientView ? hand.handlers : (tapeHand ?? hand.handlers))}
         className="relative min-h-0 flex-1 touch-pan-y overflow-hidden outline-offset-[-2px] select-none max-tablet:h-[21rem] max-tablet:flex-none"
       >
         <SceneErrorBoundary>
@@ -167,7 +175,7 @@ export function SceneStage({ picture, piece, address, actions, several, onOpenCe
           controller={view.controller}
           namesAtHeads={letter === 'D'}
           bodies={bodies}
-          tapes={shown}
+          tapes={[...shown, ...measured]}
           style={style}
           litCellId={lit}
           selectedPieceId={tapedId}
@@ -206,7 +214,13 @@ export function SceneStage({ picture, piece, address, actions, several, onOpenCe
         // Whoever sees verdicts alone may have none to show.
         tapes={tapes.length > 0 && !clientView ? seen.tapes : undefined}
       />
-      <TextTwin id={about} picture={picture} tapes={clientView ? [] : tapes} onOpenCell={onOpenCell} />
+      {!clientView && <TapeBar scene={measuring} />}
+      <TextTwin
+        id={about}
+        picture={picture}
+        tapes={clientView ? [] : [...tapes, ...measured]}
+        onOpenCell={onOpenCell}
+      />
     </section>
   );
 }

@@ -1,6 +1,7 @@
 import type { RoomAddress } from '../hooks/use-address.ts';
 import type { Choosing } from '../hooks/use-choosing.ts';
 import type { View } from '../hooks/use-view.ts';
+import { TapeToggle } from '../tape-tool/tape-bar.tsx';
 import { Toggle } from './toggle.tsx';
 
 interface Props {
@@ -30,6 +31,7 @@ export function StageTools({ address, view, choosing, bodies, tapes }: Props) {
           Tapes
         </Toggle>
       )}
+      {!address.clientView && <TapeToggle />}
       <Toggle on={address.clientView} onChange={address.setClientView}>
         Client view
       </Toggle>

@@ -40,7 +40,8 @@ const isTyping = (target: EventTarget | null): boolean =>
   target instanceof HTMLElement &&
   (target.isContentEditable || target.matches('input, textarea, select, [role="listbox"], [role="menu"] *'));
 
-const isTaken = (event: KeyboardEvent): boolean =>
+/** Whether a key belongs to something else: a field, a dialog, or whoever acted on it already. */
+export const isTaken = (event: KeyboardEvent): boolean =>
   event.defaultPrevented || isTyping(event.target) || document.querySelector('[role="dialog"]') !== null;
 
 /** Undo and redo of the whole page; none while something is typed or a dialog is open. */
