@@ -51,7 +51,8 @@ export default function HandleLayer({ piece, controller, cut, narrow }: Props) {
   }, [controller, shown]);
 
   useLayoutEffect(layOut);
-  useEffect(() => controller.subscribe(layOut), [controller, layOut]);
+  // Anew after each render, as the labels do: handles keep clear of where those have just gone.
+  useEffect(() => controller.subscribe(layOut));
 
   const onHand = useCallback((handleId: string | undefined) => {
     inHand.current = handleId;
