@@ -1,7 +1,10 @@
 import {
   endsWords,
+  mannequinMesh,
   measureEnds,
   measuringScene,
+  type MannequinMesh,
+  type MannequinPose,
   type MeasuredLine,
   type MeasureEnd,
   type MeasuringScene,
@@ -13,6 +16,14 @@ import { useSurroundings } from '../room-context.tsx';
 import { useLaidTapes } from './tape-store.ts';
 
 const placeOf = (placeId: string): number => Number(placeId.slice(placeId.lastIndexOf(':') + 1));
+
+const skins = new WeakMap<MannequinPose, MannequinMesh>();
+
+function skinOf(pose: MannequinPose): MannequinMesh {
+  const skin = skins.get(pose) ?? mannequinMesh(pose);
+  skins.set(pose, skin);
+  return skin;
+}
 
 /** A measured line as lists and the drawing show it. */
 export interface ShownMeasure {
@@ -31,12 +42,15 @@ export function useMeasuringScene(picture: RoomPicture): MeasuringScene {
     return measuringScene(
       picture.document,
       picture.parts,
-      bodies.map(({ placeId, pieceId, name, pose, mesh }) => ({
+      bodies.map(({ placeId, pieceId, name, pose }) => ({
         place: placeOf(placeId),
         pieceId,
         name,
         pose,
-        mesh,
+        // Made when somebody measures: most pages are never measured.
+        get mesh() {
+          return skinOf(pose);
+        },
       })),
     );
   }, [picture, detail]);
