@@ -15,7 +15,7 @@ import { Select } from '@/components/select.tsx';
 import { Toggle } from '../components/toggle.tsx';
 import { sayLocked } from '../hooks/use-group-actions.ts';
 import { useTakeStep } from '../hooks/use-take-step.ts';
-import { HandFormFrame } from './hand-form-panel.tsx';
+import { HandFormFrame } from './hand-form-frame.tsx';
 
 const FARTHEST_MM = 50_000;
 

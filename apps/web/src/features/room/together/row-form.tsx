@@ -17,7 +17,7 @@ import { Select } from '@/components/select.tsx';
 import { TextField } from '@/components/text-field.tsx';
 import { useTakeStep } from '../hooks/use-take-step.ts';
 import { useSurroundings } from '../room-context.tsx';
-import { HandFormFrame } from './hand-form-panel.tsx';
+import { HandFormFrame } from './hand-form-frame.tsx';
 
 const FARTHEST_MM = 50_000;
 const ROOM_WAYS = [
