@@ -29,13 +29,21 @@ export interface Survey {
   places: SurveyedPlace[];
 }
 
+const surveys = new WeakMap<SetDocument, Survey>();
+
 /**
- * Derives the parts and places of a set once, for all measurements.
+ * Derives the parts and places of a set once, for all measurements: it is kept as long as the document is.
  *
- * @param document - the set
+ * @param document - the set; it is not changed afterwards
  * @returns pieces with their solids, and places with their frames
  */
 export function survey(document: SetDocument): Survey {
+  const found = surveys.get(document) ?? surveyed(document);
+  surveys.set(document, found);
+  return found;
+}
+
+function surveyed(document: SetDocument): Survey {
   const pieces = document.pieces.map((piece) => {
     const solids = derivePieceParts(piece, document).map(planSolid);
     return { piece, solids, circle: circleAround(solids, piece) };
