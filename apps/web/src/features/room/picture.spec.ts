@@ -99,7 +99,7 @@ describe('what follows from a document', () => {
     const shift = (n: 0 | 2) =>
       chosen.bodies[0]!.pose.joints.pelvis[n] - usual.bodies[0]!.pose.joints.pelvis[n];
     expect(Math.hypot(shift(0), shift(2))).toBeCloseTo(40, 6);
-    expect(chosen.bodies[0]!.mesh).not.toBe(usual.bodies[0]!.mesh);
+    expect(chosen.bodies[0]!.pose).not.toBe(usual.bodies[0]!.pose);
     expect(chosen.sheet.rows).toEqual(usual.sheet.rows);
   });
 
@@ -107,7 +107,7 @@ describe('what follows from a document', () => {
     const maker = createPictureMaker(engine, [known]);
     expect(maker.picture(document)).toBe(maker.picture(document));
     const moved = { ...document, pieces: document.pieces.map((piece) => ({ ...piece, note: 'new' })) };
-    expect(maker.picture(moved).bodies[0]?.mesh).toBe(maker.picture(document).bodies[0]?.mesh);
+    expect(maker.picture(moved).bodies[0]?.pose).toBe(maker.picture(document).bodies[0]?.pose);
   });
 
   it('shows readers without measures the server’s verdicts and body, and draws no broken tape', () => {
@@ -116,7 +116,7 @@ describe('what follows from a document', () => {
     const picture = createPictureMaker(engine, [{ id, name, role, colour }], { server }).picture(document);
     expect(picture.sheet).toBe(server);
     expect(picture.bodies).toHaveLength(1);
-    expect(picture.bodies[0]?.mesh.positions.every(Number.isFinite)).toBe(true);
+    expect(Number.isFinite(picture.bodies[0]?.pose.headTopMm)).toBe(true);
     for (const tape of tapeLines(document, picture.sheet, added.pieceId)) {
       if (tape.kind === 'dimension') expect(Number.isFinite(tape.valueMm)).toBe(true);
     }

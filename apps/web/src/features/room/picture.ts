@@ -10,11 +10,9 @@ import {
 import {
   deriveParts,
   footRailOf,
-  mannequinMesh,
   measureSet,
   placeFrames,
   poseMannequin,
-  type MannequinMesh,
   type MannequinPose,
   type Part,
   type PlaceFrame,
@@ -26,7 +24,7 @@ import type { CastMember } from '@/lib/contract';
 import type { FitEngine } from './engine';
 import { coloursOf, sitterName, sittersOf } from './sitters';
 
-/** A body at its place, ready to be drawn. */
+/** A body at its place; its skin is made from the pose, in a worker. */
 export interface SeatedBody {
   placeId: string;
   pieceId: string;
@@ -36,7 +34,6 @@ export interface SeatedBody {
   /** True when the height itself, or more, was predicted or told. */
   estimated: boolean;
   pose: MannequinPose;
-  mesh: MannequinMesh;
   /** Top of the head, where the leader of a name ends. */
   crownMm: Vec3;
 }
@@ -80,7 +77,7 @@ function crownOf(pose: MannequinPose, frame: PlaceFrame): Vec3 {
 
 /** Remembers the last body drawn at a place, so that a change elsewhere costs nothing. */
 function createBodyMaker() {
-  const kept = new Map<string, { key: string; pose: MannequinPose; mesh: MannequinMesh }>();
+  const kept = new Map<string, { key: string; pose: MannequinPose }>();
   return (
     frame: PlaceFrame,
     situation: PlaceSituation,
@@ -97,8 +94,7 @@ function createBodyMaker() {
     const key = JSON.stringify(input);
     const last = kept.get(frame.placeId);
     if (last?.key === key) return last;
-    const pose = poseMannequin(input);
-    const made = { key, pose, mesh: mannequinMesh(pose) };
+    const made = { key, pose: poseMannequin(input) };
     kept.set(frame.placeId, made);
     return made;
   };
@@ -185,7 +181,7 @@ export function createPictureMaker(
       if (!frame || !body || !measured) return [];
       const made = makeBody(frame, measured, body, parts, posture);
       if (!made) return [];
-      const { pose, mesh } = made;
+      const { pose } = made;
       return [
         {
           placeId,
@@ -195,7 +191,6 @@ export function createPictureMaker(
           statureMm: body.means.stature,
           estimated: body.estimated,
           pose,
-          mesh,
           crownMm: crownOf(pose, frame),
         },
       ];

@@ -1,6 +1,7 @@
-import { MANNEQUIN_TAGS, type MannequinMesh } from '@settlewright/geometry';
+import { MANNEQUIN_TAGS, type MannequinDetail, type MannequinMesh } from '@settlewright/geometry';
 import { useEffect, useMemo } from 'react';
 import { BufferAttribute, BufferGeometry } from 'three';
+import { useBodyMesh } from '../bodies/use-body-mesh.ts';
 import type { RoomPicture, SeatedBody } from '../picture.ts';
 import { linesOf } from './ink-lines.ts';
 import type { Palette } from './palette.ts';
@@ -9,6 +10,8 @@ import { createBodyMaterial, type SceneMaterials, type SharedUniforms } from './
 /** Tones of the body shader: suit, paler head and hands, dark shoes. */
 const TONE_OF_TAG: Record<(typeof MANNEQUIN_TAGS)[number], number> = { suit: 0, head: 1, hand: 1, shoe: 2 };
 const SEAM_WEIGHT = 0.28;
+/** Up to so many people are drawn finely; beyond, each is small in the picture, and seams are left out. */
+const FINE_SITTERS = 12;
 
 function geometryOf(mesh: MannequinMesh): BufferGeometry {
   const geometry = new BufferGeometry();
@@ -27,34 +30,41 @@ function seamsOf({ positions, seams }: MannequinMesh) {
 
 interface FigureProps {
   body: SeatedBody;
+  detail: MannequinDetail;
   palette: Palette;
   shared: SharedUniforms;
   materials: SceneMaterials;
 }
 
-function Figure({ body, palette, shared, materials }: FigureProps) {
-  const geometry = useMemo(() => geometryOf(body.mesh), [body.mesh]);
-  const seams = useMemo(() => seamsOf(body.mesh), [body.mesh]);
+function Skin({ mesh, body, detail, palette, shared, materials }: FigureProps & { mesh: MannequinMesh }) {
+  const geometry = useMemo(() => geometryOf(mesh), [mesh]);
+  const seams = useMemo(() => (detail === 'near' ? seamsOf(mesh) : undefined), [mesh, detail]);
   const material = useMemo(() => {
     const colour = palette.sitters[body.colour - 1];
     return createBodyMaterial(shared, (colour ?? palette.pen).clone());
   }, [palette, body.colour, shared]);
   useEffect(() => () => geometry.dispose(), [geometry]);
-  useEffect(() => () => seams.dispose(), [seams]);
+  useEffect(() => () => seams?.dispose(), [seams]);
   useEffect(() => () => material.dispose(), [material]);
   return (
     <>
       <mesh geometry={geometry} material={material} frustumCulled={false} />
-      <mesh geometry={seams} material={materials.edges} renderOrder={2} frustumCulled={false} />
+      {seams && <mesh geometry={seams} material={materials.edges} renderOrder={2} frustumCulled={false} />}
     </>
   );
 }
 
-interface Props extends Omit<FigureProps, 'body'> {
+function Figure(props: FigureProps) {
+  const mesh = useBodyMesh(props.body.pose, props.detail);
+  return mesh && <Skin mesh={mesh} {...props} />;
+}
+
+interface Props extends Omit<FigureProps, 'body' | 'detail'> {
   picture: RoomPicture;
 }
 
-/** Lay figures in a plain suit, two draw calls each. */
+/** Lay figures in a plain suit: two draw calls each while they are few, one in a large company. */
 export function BodyFigures({ picture, ...rest }: Props) {
-  return picture.bodies.map((body) => <Figure key={body.placeId} body={body} {...rest} />);
+  const detail = picture.bodies.length > FINE_SITTERS ? 'far' : 'near';
+  return picture.bodies.map((body) => <Figure key={body.placeId} body={body} detail={detail} {...rest} />);
 }

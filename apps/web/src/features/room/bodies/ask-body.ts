@@ -1,0 +1,52 @@
+import {
+  mannequinMesh,
+  type MannequinDetail,
+  type MannequinMesh,
+  type MannequinPose,
+} from '@settlewright/geometry';
+import { createAsker } from '@/lib/ask-worker.ts';
+import type { BodyQuestion } from './body.worker.ts';
+
+const ask = createAsker(
+  () => new Worker(new URL('./body.worker.ts', import.meta.url), { type: 'module', name: 'bodies' }),
+  'The drawing of bodies stopped.',
+);
+
+const made = new WeakMap<MannequinPose, Partial<Record<MannequinDetail, MannequinMesh>>>();
+
+/** A skin that was made before; it is forgotten with its pose. */
+export const knownBody = (pose: MannequinPose, detail: MannequinDetail): MannequinMesh | undefined =>
+  made.get(pose)?.[detail];
+
+function keep(pose: MannequinPose, detail: MannequinDetail, mesh: MannequinMesh): MannequinMesh {
+  made.set(pose, { ...made.get(pose), [detail]: mesh });
+  return mesh;
+}
+
+let last: Promise<unknown> = Promise.resolve();
+
+/**
+ * Has a worker make the skin of a pose, so that the page stays free. One is made at a time: those that nobody wants any
+ * more when their turn comes are not made, and answer with nothing. Where there are no workers the page makes it itself.
+ */
+export function askBody(
+  pose: MannequinPose,
+  detail: MannequinDetail,
+  isWanted: () => boolean,
+): Promise<MannequinMesh | undefined> {
+  const answer = last.then(async () => {
+    if (!isWanted()) return undefined;
+    const known = knownBody(pose, detail);
+    if (known) return known;
+    if (typeof Worker === 'undefined') return keep(pose, detail, mannequinMesh(pose, detail));
+    const { means, stance, placement } = pose;
+    const mesh = await ask<MannequinMesh>((id): BodyQuestion => ({
+      id,
+      pose: { means, stance, placement },
+      detail,
+    }));
+    return keep(pose, detail, mesh);
+  });
+  last = answer.catch(() => undefined);
+  return answer;
+}
