@@ -34,6 +34,8 @@ export interface FitView {
   colourOf: (sitterId: string) => number;
   /** Words behind a name: "5′ 2″", "5′ 10″, est."; empty when not for this reader. */
   aside: (sitterId: string) => string;
+  /** Says that somebody is drawn in another posture than the one measured; empty where they are not. */
+  measuredAs?: (sitterId: string) => string;
   litCellId: string | null;
   light: (cellId: string | null) => void;
   openCellId: string | null;

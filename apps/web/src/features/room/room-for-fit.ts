@@ -18,6 +18,7 @@ import {
 import { useMemo } from 'react';
 import { useRoomAddress } from './hooks/use-address.ts';
 import { usePieceActions } from './hooks/use-piece-actions.ts';
+import { sayMeasuredAs } from './posture/choice-words.ts';
 import { usePicture, useSurroundings } from './room-context.tsx';
 import { coloursOf, personOf, sittersOf } from './sitters.ts';
 import { useRoom, useRoomStore } from './store.ts';
@@ -33,6 +34,8 @@ export interface RoomForFit {
   colourOf: (sitterId: string) => number;
   /** Words behind a name: "5′ 2″", "5′ 10″, est.". */
   aside: (sitterId: string) => string;
+  /** Says that somebody is drawn in another posture than the one measured; empty where they are not. */
+  measuredAs: (sitterId: string) => string;
   litCellId: string | null;
   light: (cellId: string | null) => void;
   openCellId: string | null;
@@ -68,6 +71,9 @@ export function useRoomForFit(): RoomForFit {
     const placeOf = new Map(picture.sheet.rows.map((row) => [row.sitterId, row.placeId]));
     const colourAt = coloursOf(picture.document, cast);
     const bodyOf = new Map(picture.bodies.map((body) => [body.placeId, body]));
+    const postureAt = new Map(
+      picture.document.seating.map(({ pieceId, place, posture }) => [`${pieceId}:${place}`, posture]),
+    );
     return {
       document: picture.document,
       sheet: picture.sheet,
@@ -81,6 +87,7 @@ export function useRoomForFit(): RoomForFit {
         if (!body || detail === 'verdicts') return '';
         return `${formatLength(body.statureMm, { ...style, feet: true })}${body.estimated ? ', est.' : ''}`;
       },
+      measuredAs: (sitterId) => sayMeasuredAs(postureAt.get(placeOf.get(sitterId) ?? ''), style),
       litCellId,
       light: (cellId) => store.getState().light(cellId),
       openCellId,

@@ -1,6 +1,7 @@
 import { SOURCE_MARK_WORDS, whyFor, type FitCell } from '@settlewright/anthropometry';
 import type { CSSProperties } from 'react';
 import { classNames } from '@/components/class-names.ts';
+import { Measure } from '@/components/measure.tsx';
 import { Verdict } from '@/components/verdict.tsx';
 import { useFitView } from '../fit-view.ts';
 import { Doubt, Sums } from './cell-sums.tsx';
@@ -29,9 +30,10 @@ function SourceLine({ ruleId }: { ruleId: string }) {
 
 /** Everything behind one cell: the sum, why, the source, and what would change it. */
 export function CellSlip({ cell, sitterName }: { cell: FitCell; sitterName: string }) {
-  const { ruleBook, detail, fixesFor } = useFitView();
+  const { ruleBook, detail, fixesFor, measuredAs } = useFitView();
   const { outcome } = cell;
   const verdict = outcome.kind === 'verdict' ? outcome : undefined;
+  const posture = cell.scope === 'person' ? (measuredAs?.(cell.sitterId ?? '') ?? '') : '';
   const sums = verdict !== undefined && detail === 'full';
   // The public sits nowhere in particular, so there is no one number to change for it.
   const ofThePublic = cell.scope === 'person' && cell.sitterId === undefined;
@@ -63,6 +65,11 @@ export function CellSlip({ cell, sitterName }: { cell: FitCell; sitterName: stri
           </p>
           {verdict && sums && <Doubt outcome={verdict} cell={cell} of={sitterName} />}
           {cell.side !== undefined && <p className="mt-2 text-sm text-ink-2">At the sitter’s {cell.side}.</p>}
+          {posture !== '' && (
+            <p className="mt-2 text-sm text-ink-2">
+              <Measure text={posture} />
+            </p>
+          )}
           <SourceLine ruleId={cell.ruleId} />
         </div>
         {fixable && (

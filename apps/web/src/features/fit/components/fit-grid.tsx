@@ -32,7 +32,7 @@ const FROZEN = 'sticky left-0 bg-(--ground) pr-3 text-left whitespace-nowrap';
 
 /** Sitters by checks. Arrow keys move between cells, Enter opens one, Escape closes it. */
 export function FitGrid({ order = 'place', showPlace, showPublic, ground, className }: FitGridProps) {
-  const { sheet, ruleBook, colourOf, aside, openCellId, open } = useFitView();
+  const { sheet, ruleBook, colourOf, aside, measuredAs, openCellId, open } = useFitView();
   const columns = useMemo(() => columnsOf(sheet, ruleBook), [sheet, ruleBook]);
   const rows = useMemo(() => orderedRows(sheet, order), [sheet, order]);
   const turned = useTurnedCells(sheet);
@@ -122,6 +122,11 @@ export function FitGrid({ order = 'place', showPlace, showPublic, ground, classN
                           {said !== '' && (
                             <span className="text-sm font-normal text-ink-2">
                               <Measure text={said} />
+                            </span>
+                          )}
+                          {measuredAs?.(row.sitterId) && (
+                            <span className="block text-xs font-normal text-ink-2">
+                              measured in the standard posture
                             </span>
                           )}
                         </span>

@@ -16,6 +16,7 @@ import { RoomContext, useAutosave, usePicture, useSurroundings } from '../room-c
 import { useRoomStore, useUndo } from '../store.ts';
 import { HandFormPanel } from '../together/hand-form-panel.tsx';
 import { useHandForm } from '../together/hand-form.ts';
+import { PosturePanel } from '../posture/posture-panel.tsx';
 import { MeasurePanel } from '../tape-tool/measure-panel.tsx';
 import { WaysPanel } from '../ways/ways-panel.tsx';
 import { ChosenPieces } from './chosen-pieces.tsx';
@@ -141,6 +142,7 @@ export function RoomDesk({ lastRevision, foot, aboutPiece }: Props) {
               aboutPiece={aboutPiece}
             />
             {!empty && <KeyPlan picture={picture} address={address} />}
+            {!empty && !clientView && <PosturePanel />}
             {!empty && !clientView && <MeasurePanel />}
             {!empty && !clientView && <WaysPanel />}
             <KnownDifferences document={document} onReplace={actions.replace} />

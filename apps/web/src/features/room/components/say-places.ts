@@ -1,41 +1,6 @@
-import { formatLength, type LengthStyle, type PoseNote, type SetDocument } from '@settlewright/geometry';
+import type { LengthStyle, SetDocument } from '@settlewright/geometry';
 import type { SeatedBody } from '../picture.ts';
-
-function sayNote({ kind, valueMm = 0, side = 'left' }: PoseNote, style: LengthStyle): string {
-  const size = formatLength(valueMm, style);
-  switch (kind) {
-    case 'feet-hang':
-      return `feet hang ${size}`;
-    case 'slides-forward':
-      return `sits ${size} forward of the back to free the knees; the back is not supported`;
-    case 'knees-lift':
-      return 'the seat is low: the thighs lift off it';
-    case 'forearms-on-table':
-      return 'forearms on the table';
-    case 'hands-on-lap':
-      return 'hands on the lap';
-    case 'feet-on-rail':
-      return 'feet on the rail';
-    case 'rail-out-of-reach':
-      return 'no rail in reach of the feet';
-    case 'sits-upright':
-      return 'sits upright, off the back';
-    case 'slumps':
-      return 'slumps';
-    case 'forearms-level':
-      return 'arms hanging, forearms level';
-    case 'hand-to-cup':
-      return 'right hand at a cup';
-    case 'table-out-of-reach':
-      return 'no table in reach';
-    case 'forearm-on-sill':
-      return `${side} forearm on the sill`;
-    case 'sill-out-of-reach':
-      return `no sill in reach on the ${side}`;
-    case 'not-as-checked':
-      return 'posture chosen by hand; the checks are for the usual one';
-  }
-}
+import { sayNote } from '../posture/note-words.ts';
 
 type Said = Pick<SeatedBody, 'pieceId' | 'placeId' | 'name'> & {
   pose: Pick<SeatedBody['pose'], 'notes'>;

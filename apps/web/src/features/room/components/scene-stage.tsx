@@ -25,6 +25,7 @@ import { HiddenNote } from '../together/hidden-note.tsx';
 import { TapeBar } from '../tape-tool/tape-bar.tsx';
 import { linesOnScene, useMeasures, useMeasuringScene } from '../tape-tool/use-measuring.ts';
 import { useTapeHand } from '../tape-tool/use-tape-hand.ts';
+import { GapsOnScene } from '../touching/gaps-on-scene.tsx';
 import { WayOnScene } from '../ways/way-on-scene.tsx';
 import { EyeMark } from './eye-mark.tsx';
 import { SceneErrorBoundary } from './scene-error-boundary.tsx';
@@ -74,6 +75,7 @@ export function SceneStage({ picture, piece, address, actions, several, onOpenCe
     picture,
     view,
     letter,
+    showBodies,
     selectedPieceId: address.pieceId,
     onSelect: address.select,
     choosing: several?.choosing,
@@ -194,6 +196,7 @@ export function SceneStage({ picture, piece, address, actions, several, onOpenCe
           </Suspense>
         )}
         <WayOnScene controller={view.controller} style={style} />
+        {!clientView && <GapsOnScene controller={view.controller} style={style} />}
         {view.lensBox && <LensMask box={view.lensBox} />}
         {letter === 'D' && seen.lens && (
           <LensOnPlan controller={view.controller} lens={seen.lens} style={style} />

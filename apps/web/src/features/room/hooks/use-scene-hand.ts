@@ -11,7 +11,9 @@ import { announce } from '@/lib/announce.ts';
 import type { RoomPicture } from '../picture.ts';
 import { nameMove, nameMoves, readOutMove } from '../move-words.ts';
 import { useSurroundings } from '../room-context.tsx';
-import { onLevel, pieceUnder } from '../scene/pick.ts';
+import { choosePlace } from '../posture/chosen-place.ts';
+import { bodyUnder } from '../posture/pick-body.ts';
+import { firstUnder, onLevel, pieceUnder } from '../scene/pick.ts';
 import { turn } from '../scene/vectors.ts';
 import { pixelsPerMm, rayThrough } from '../scene/view-frame.ts';
 import type { SceneView } from '../scene/views.ts';
@@ -62,13 +64,14 @@ export function useSceneHand(options: {
   picture: RoomPicture;
   view: View;
   letter: SceneView;
+  showBodies: boolean;
   selectedPieceId: string | undefined;
   onSelect: (pieceId: string | undefined) => void;
   choosing: Choosing | undefined;
   /** Stands near the pointer while a piece is dragged. */
   readOut: RefObject<HTMLDivElement | null>;
 }) {
-  const { picture, view, letter, selectedPieceId, onSelect, choosing, readOut } = options;
+  const { picture, view, letter, showBodies, selectedPieceId, onSelect, choosing, readOut } = options;
   const store = useRoomStore();
   const { canEdit, style } = useSurroundings();
   const drag = useRef<Drag | null>(null);
@@ -206,8 +209,20 @@ export function useSceneHand(options: {
         announce(snapped.snappedTo ? `${step}, ${snapped.snappedTo}` : step);
       }
     }
-    if (hand && !hand.moving) letGo(hand);
+    if (hand && !hand.moving && !chooseBody(hand)) letGo(hand);
     wanted.current = null;
+  }
+
+  /** A press on a body chooses who sits there, and what they sit on. */
+  function chooseBody({ startX, startY, adding, onGroup }: Drag): boolean {
+    const ray = rayAt(startX, startY);
+    if (!ray || !showBodies || adding || onGroup) return false;
+    const before = firstUnder(visibleParts(picture.document, picture.parts, letter), ray)?.distanceMm;
+    const body = bodyUnder(picture.bodies, ray, before);
+    if (!body) return false;
+    choosePlace(body.placeId);
+    onSelect(body.pieceId);
+    return true;
   }
 
   /** A press without a way: chooses one, adds one, or lets go of all. */

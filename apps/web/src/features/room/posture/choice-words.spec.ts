@@ -1,0 +1,20 @@
+import { expect, it } from 'vitest';
+import { sayChoice, sayMeasuredAs } from './choice-words.ts';
+
+const inches = { system: 'feet-inches', roundTo: 8 } as const;
+
+it('says a chosen posture, each part in its own words, and to which side somebody is moved', () => {
+  expect(sayChoice({ trunk: 'upright', arms: 'sill-right', feet: 'rail' }, inches)).toBe(
+    'upright, off the back, right forearm on the sill, feet on the rail',
+  );
+  expect(sayChoice({ nudge: { leftMm: -25.4, aheadMm: 50.8 } }, inches)).toBe(
+    'moved 1″ to the sitter’s right, moved 2″ forward',
+  );
+});
+
+it('says what the checks measured only where somebody chose otherwise', () => {
+  expect(sayMeasuredAs(undefined, inches)).toBe('');
+  expect(sayMeasuredAs({ arms: 'table' }, inches)).toBe(
+    'Measured in the standard posture; shown forearms on the table.',
+  );
+});

@@ -1,0 +1,55 @@
+import { jointWarnings, readJointRanges, type JointWarning } from '@settlewright/geometry';
+import jointFile from '@settlewright/seed-data/joint-ranges.json';
+import { SOURCE_MARK_WORDS } from '@settlewright/anthropometry';
+import { Measure } from '@/components/measure.tsx';
+import type { SeatedBody } from '../picture.ts';
+import { useSurroundings } from '../room-context.tsx';
+import { useRoom } from '../store.ts';
+import { sayMeasuredAs } from './choice-words.ts';
+import { sayNote } from './note-words.ts';
+
+const RANGES = readJointRanges(jointFile);
+
+const sayWarning = ({ joint, motion, side, deg, limitDeg, source }: JointWarning): string =>
+  `${side ? `${side} ` : ''}${joint} ${motion} ${Math.round(deg)}°, beyond the ${limitDeg}° that most people manage (${source.cite}; ${SOURCE_MARK_WORDS[source.mark]})`;
+
+const asSentence = (words: string): string => `${words.charAt(0).toUpperCase()}${words.slice(1)}.`;
+
+/** How the sitter sits now, and what of it few people could hold. */
+export function SittingWords({ body }: { body: SeatedBody }) {
+  const { style } = useSurroundings();
+  const choice = useRoom(({ document }) =>
+    document.seating.find((seat) => `${seat.pieceId}:${seat.place}` === body.placeId),
+  )?.posture;
+  const notes = body.pose.notes.filter(({ kind }) => kind !== 'not-as-checked');
+  const leans = notes.some(
+    ({ kind }) => kind === 'sits-upright' || kind === 'slumps' || kind === 'slides-forward',
+  );
+  const words = [
+    ...(leans ? [] : ['sits against the back']),
+    ...notes.map((note) => sayNote(note, style)),
+    ...(body.pose.heelGapMm > 0.5 || notes.some(({ kind }) => kind === 'feet-on-rail')
+      ? []
+      : ['feet on the floor']),
+    'head level',
+  ];
+  const warnings = jointWarnings(body.pose, RANGES);
+  const measuredAs = sayMeasuredAs(choice, style);
+  return (
+    <div>
+      <p data-sitting>
+        <Measure text={asSentence(words.join(', '))} />
+      </p>
+      {measuredAs !== '' && (
+        <p className="mt-1 text-ink-2">
+          <Measure text={measuredAs} />
+        </p>
+      )}
+      {warnings.map((warning) => (
+        <p key={`${warning.joint} ${warning.motion} ${warning.side ?? ''}`} className="mt-1 text-tight">
+          {asSentence(sayWarning(warning))}
+        </p>
+      ))}
+    </div>
+  );
+}

@@ -1,0 +1,146 @@
+import {
+  jointEnvelopes,
+  readJointRanges,
+  type SitterDistances,
+  type SitterGap,
+} from '@settlewright/geometry';
+import jointFile from '@settlewright/seed-data/joint-ranges.json';
+import { useEffect, useState } from 'react';
+import { Measure } from '@/components/measure.tsx';
+import { Toggle } from '../components/toggle.tsx';
+import type { RoomPicture } from '../picture.ts';
+import { choosePlace } from '../posture/chosen-place.ts';
+import { useSurroundings } from '../room-context.tsx';
+import { hideGaps, showGaps } from './shown-gaps.ts';
+import { isMeant, sayGap, sayThing } from './touch-words.ts';
+import { useDistances } from './use-distances.ts';
+
+const RANGES = readJointRanges(jointFile);
+
+interface Props {
+  picture: RoomPicture;
+  placeId: string;
+}
+
+/** For every sitter what they touch, what they reach into, and the smallest gap that is left. */
+export function RoomRound({ picture, placeId }: Props) {
+  const { style } = useSurroundings();
+  const { distances, fault } = useDistances(picture);
+  const [envelopes, setEnvelopes] = useState(false);
+  useEffect(
+    () =>
+      showGaps({ overlaps: distances?.flatMap((one) => one.overlaps.filter((gap) => !isMeant(gap))) ?? [] }),
+    [distances],
+  );
+  useEffect(() => hideGaps, []);
+  const pose = picture.bodies.find((body) => body.placeId === placeId)?.pose;
+  useEffect(
+    () => showGaps({ envelopes: envelopes && pose ? jointEnvelopes(pose, RANGES) : [] }),
+    [envelopes, pose],
+  );
+  return (
+    <div>
+      <h3 className="font-semibold">Room round each sitter</h3>
+      {fault && <p className="text-wont">{fault} Change the set or open this again.</p>}
+      {!distances && !fault && <p role="status">Measuring.</p>}
+      <ul className="flex flex-col gap-2 pt-1">
+        {distances?.map((one) => (
+          <Sitter key={one.placeId} one={one} picture={picture} chosen={one.placeId === placeId} />
+        ))}
+      </ul>
+      <Toggle on={envelopes} onChange={setEnvelopes}>
+        What elbows and knees sweep
+      </Toggle>
+      {envelopes &&
+        RANGES.sweeps.map(({ joint, words, source }) => (
+          <p key={joint} className="text-ink-3">
+            {words} {source.cite}.
+          </p>
+        ))}
+      <p className="text-ink-3">
+        Between the bodies as drawn and the parts; the seat and the back they rest on are left out. Guidance:
+        no check reads it.{' '}
+        <Measure
+          text={`Solids stand for a body within ${style.system === 'millimetres' ? '10 mm' : '3/8″'} at raised elbows and shoulders, elsewhere within ${style.system === 'millimetres' ? '3 mm' : '1/8″'}.`}
+        />
+      </p>
+    </div>
+  );
+}
+
+interface SitterProps {
+  one: SitterDistances;
+  picture: RoomPicture;
+  chosen: boolean;
+}
+
+function Sitter({ one, picture, chosen }: SitterProps) {
+  const { style } = useSurroundings();
+  const name = picture.bodies.find(({ placeId }) => placeId === one.placeId)?.name ?? '';
+  const met = [...one.overlaps, ...one.contacts];
+  const rests = [...new Set(met.filter(isMeant).map((gap) => `${gap.segment} on ${sayThing(gap, picture)}`))];
+  const inTheWay = one.overlaps.filter((gap) => !isMeant(gap));
+  const touches = one.contacts.filter((gap) => !isMeant(gap));
+  return (
+    <li className={chosen ? 'border-l-2 border-ink pl-2' : 'pl-2.5'}>
+      <p className="font-medium">{name}</p>
+      {inTheWay.map((gap) => (
+        <GapLine
+          key={`${gap.segment} ${sayThing(gap, picture)}`}
+          gap={gap}
+          placeId={one.placeId}
+          tone="text-wont"
+        >
+          {sayGap(gap, picture, style)}
+        </GapLine>
+      ))}
+      {touches.length > 0 && (
+        <p className="text-tight">
+          Touches{' '}
+          {[...new Set(touches.map((gap) => `${sayThing(gap, picture)} with the ${gap.segment}`))].join(', ')}
+        </p>
+      )}
+      {rests.length > 0 && <p>Rests: {rests.join(', ')}</p>}
+      {one.smallest ? (
+        <GapLine gap={one.smallest} placeId={one.placeId}>
+          {sayGap(one.smallest, picture, style)}
+        </GapLine>
+      ) : (
+        <p>Nothing within reach</p>
+      )}
+    </li>
+  );
+}
+
+function GapLine({
+  gap,
+  placeId,
+  tone = '',
+  children,
+}: {
+  gap: SitterGap;
+  placeId: string;
+  tone?: string;
+  children: string;
+}) {
+  const light = () => showGaps({ lit: gap });
+  const dim = () => showGaps({ lit: undefined });
+  return (
+    <p>
+      <button
+        type="button"
+        className={`link min-h-6 text-left ${tone}`}
+        onMouseEnter={light}
+        onMouseLeave={dim}
+        onFocus={light}
+        onBlur={dim}
+        onClick={() => {
+          choosePlace(placeId);
+          light();
+        }}
+      >
+        <Measure text={children} />
+      </button>
+    </p>
+  );
+}
