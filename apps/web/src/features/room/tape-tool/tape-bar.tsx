@@ -8,7 +8,7 @@ export function TapeToggle() {
   const on = useTapeTool((state) => state.on);
   return (
     <Toggle on={on} onChange={takeTape}>
-      Tape
+      Tape measure
     </Toggle>
   );
 }
