@@ -1,6 +1,7 @@
 import { ellipsoid, roundedCone, type Shape } from '../src/distance/shape.ts';
 import { partShape } from '../src/distance/solids.ts';
 import type { Part, Solid, Vec3 } from '../src/parts/part.ts';
+import { barMesh, coneMesh, ellipsoidMesh, prismMesh, type SolidMesh } from './solid-meshes.ts';
 
 /** A solid with what is known of it without the code under test: formulas of its own. */
 export interface KnownSolid {
@@ -10,6 +11,8 @@ export interface KnownSolid {
   reach: (n: Vec3) => number;
   /** How far a point is outside, in millimetres or near enough; 0 or less inside. */
   outside: (p: Vec3) => number;
+  /** Its surface in triangles, round ones cut by chords of `sagMm`. */
+  mesh: (sagMm: number) => SolidMesh;
 }
 
 const dot = (a: Vec3, b: Vec3): number => a[0] * b[0] + a[1] * b[1] + a[2] * b[2];
@@ -53,10 +56,19 @@ function knownCone(from: Vec3, r0: number, to: Vec3, r1: number): KnownSolid {
       }
       return Math.min(at(0), at(1), at((low + high) / 2));
     },
+    mesh: (sagMm) => coneMesh(from, r0, to, r1, sagMm),
   };
 }
 
 type Matrix = readonly [Vec3, Vec3, Vec3];
+
+/** Carries a point of a solid's own frame into the room. */
+const placing =
+  (turn: Matrix, at: Vec3) =>
+  (p: Vec3): Vec3 =>
+    [0, 1, 2].map(
+      (i) => at[i]! + turn[0][i]! * p[0] + turn[1][i]! * p[1] + turn[2][i]! * p[2],
+    ) as unknown as Vec3;
 
 /** Columns of the turn about z, then x, then y. */
 function turnOf([x, y, z]: Vec3): Matrix {
@@ -78,6 +90,7 @@ function knownEllipsoid(centre: Vec3, radii: Vec3, turn: Matrix): KnownSolid {
       const share = Math.hypot(...turn.map((axis, i) => dot(axis, sub(p, centre)) / radii[i]!));
       return (share - 1) * Math.min(...radii);
     },
+    mesh: (sagMm) => ellipsoidMesh(radii, sagMm, placing(turn, centre)),
   };
 }
 
@@ -122,6 +135,19 @@ function knownPart(solid: Solid, positionMm: Vec3, rotationRad: Vec3): KnownSoli
     shape: partShape(part),
     reach: (n) => dot(positionMm, n) + ownReach(own(n)),
     outside: (p) => ownOutside(own(sub(p, positionMm))),
+    mesh: (sagMm) => {
+      const place = placing(turn, positionMm);
+      if (solid.shape === 'cylinder') return barMesh(solid.radiusMm, solid.heightMm, sagMm, place);
+      if (solid.shape === 'prism') return prismMesh(solid.outlineMm, solid.depthMm, place);
+      const [w, h, d] = solid.sizeMm.map((x) => x / 2) as unknown as Vec3;
+      const rectangle = [
+        [-w, -h],
+        [w, -h],
+        [w, h],
+        [-w, h],
+      ] as const;
+      return prismMesh(rectangle, 2 * d, place);
+    },
   };
 }
 
