@@ -77,6 +77,10 @@ describe('named views', () => {
     await plan().getByRole('button', { name: 'Show it on the plan' }).click();
     const handle = page.getByRole('button', { name: /^Lens on the plan/ });
     const across = plan().getByRole('textbox', { name: 'Across, from the middle to the right' });
+    const drawn = await page.locator('[data-scene]').boundingBox();
+    const spot = await handle.boundingBox();
+    expect(spot!.y).toBeGreaterThan(drawn!.y + drawn!.height / 2);
+    expect(spot!.y).toBeLessThan(drawn!.y + drawn!.height);
     const before = await across.inputValue();
     await handle.press('ArrowRight');
     await expect.poll(() => across.inputValue()).not.toBe(before);
@@ -103,7 +107,7 @@ describe('named views', () => {
       await dialog.getByRole('button', { name: /^Named view/ }).click();
       await page.getByRole('option', { name: view }).click();
     }
-    const arriving = page.waitForEvent('download');
+    const arriving = page.waitForEvent('download', { timeout: 60_000 });
     await dialog.getByRole('button', { name: 'Save', exact: true }).click();
     return readFile(await (await arriving).path());
   }

@@ -201,6 +201,7 @@ export default function LensForm({ view, lens, picture, address, actions }: Prop
         {canEdit && asked !== lens.heightMm && (
           <Button
             look="word"
+            className="text-left"
             onClick={() => {
               const { document, commit } = store.getState();
               const step = `Height of the lens asked for: ${formatLength(lens.heightMm, { ...style, feet: true })}`;

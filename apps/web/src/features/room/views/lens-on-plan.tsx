@@ -37,7 +37,11 @@ export function LensOnPlan({ controller, lens: { id, camera }, style }: Props) {
     put(aimHandle.current, aim);
   }, [controller, camera, lensHandle, aimHandle]);
   useLayoutEffect(layOut);
-  useEffect(() => controller.subscribe(layOut), [controller, layOut]);
+  // The view goes to the plan after this is laid out first, and before it listens.
+  useEffect(() => {
+    layOut();
+    return controller.subscribe(layOut);
+  }, [controller, layOut]);
 
   return (
     <div className="pointer-events-none absolute inset-0 overflow-hidden" data-lens-on-plan>

@@ -2,7 +2,7 @@ import { useCallback, useRef, useState, type ReactNode } from 'react';
 import type { RoomPicture } from '../picture.ts';
 import { ViewShot, type Shot } from './view-shot.tsx';
 
-const PATIENCE_MS = 30_000;
+const PATIENCE_MS = 120_000;
 
 interface Job extends Shot {
   number: number;
