@@ -52,15 +52,33 @@ function widened(piece: Piece): PieceDefinition<PieceKind> {
   return DEFINITIONS[piece.kind] as unknown as PieceDefinition<PieceKind>;
 }
 
+/** Parts of a piece, and the sills whose windows they were cut around. */
+interface KeptParts {
+  sills: readonly Piece[];
+  parts: readonly Part[];
+}
+
+const kept = new WeakMap<Piece, KeptParts>();
+const NO_SILLS: readonly Piece[] = [];
+
 /**
- * Boards, panels and cushions of one piece.
+ * Boards, panels and cushions of one piece. They are derived once for a piece and kept as long as it is: a piece that
+ * did not change gives the very same list again, in whatever set it stands.
  *
- * @param piece - the piece
+ * @param piece - the piece; it is not changed afterwards
  * @param document - the set; when given, boards of a bulkhead are cut around the windows of its sills
  * @returns parts in the room frame
  */
-export function derivePieceParts(piece: Piece, document?: SetDocument): Part[] {
-  return widened(piece).parts(piece, document);
+export function derivePieceParts(piece: Piece, document?: SetDocument): readonly Part[] {
+  const sills =
+    piece.kind === 'bulkhead' && document ? document.pieces.filter(({ kind }) => kind === 'sill') : NO_SILLS;
+  const known = kept.get(piece);
+  if (known?.sills.length === sills.length && known.sills.every((sill, n) => sill === sills[n])) {
+    return known.parts;
+  }
+  const parts = widened(piece).parts(piece, document);
+  kept.set(piece, { sills, parts });
+  return parts;
 }
 
 /**

@@ -165,7 +165,7 @@ describe('a bulkhead behind a sill', () => {
   });
 
   it('loses exactly the hole', () => {
-    const volume = (parts: Part[]) => parts.reduce((sum, part) => sum + volumeMm3(part), 0);
+    const volume = (parts: readonly Part[]) => parts.reduce((sum, part) => sum + volumeMm3(part), 0);
     const solid: PieceOf<'bulkhead'> = { ...wall, boards: { faceMm: 100, revealMm: 0 } };
     const lost = volume(derivePieceParts(solid)) - volume(derivePieceParts(solid, document));
     const { widthMm, heightMm, frameMm } = sill.opening;

@@ -1,3 +1,4 @@
+import type { Part } from '../parts/part.ts';
 import { benchLayout } from '../pieces/bench-layout.ts';
 import { derivePieceParts } from '../pieces/kinds.ts';
 import { placeFrames, type PlaceFrame } from '../pieces/place-frames.ts';
@@ -43,11 +44,21 @@ export function survey(document: SetDocument): Survey {
   return found;
 }
 
+const surveyedPieces = new WeakMap<readonly Part[], SurveyedPiece>();
+
+/** Kept with the parts, which are the same as long as the piece is. */
+function surveyedPiece(piece: Piece, document: SetDocument): SurveyedPiece {
+  const parts = derivePieceParts(piece, document);
+  const known = surveyedPieces.get(parts);
+  if (known) return known;
+  const solids = parts.map(planSolid);
+  const found = { piece, solids, circle: circleAround(solids, piece) };
+  surveyedPieces.set(parts, found);
+  return found;
+}
+
 function surveyed(document: SetDocument): Survey {
-  const pieces = document.pieces.map((piece) => {
-    const solids = derivePieceParts(piece, document).map(planSolid);
-    return { piece, solids, circle: circleAround(solids, piece) };
-  });
+  const pieces = document.pieces.map((piece) => surveyedPiece(piece, document));
   const places = document.pieces.flatMap((piece) =>
     piece.kind === 'bench' || piece.kind === 'loose-seat'
       ? placeFrames(piece, document).map((frame) => surveyedPlace(frame, piece))
