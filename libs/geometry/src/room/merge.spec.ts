@@ -76,6 +76,35 @@ describe('mergeDocuments', () => {
     expect([unseated, remarked]).toEqual([[], []]);
   });
 
+  it('brings the entrance together: set by one side, moved by both, taken away', () => {
+    const enter = (document: SetDocument, xMm: number) => ({
+      ...document,
+      asked: { ...document.asked, entrance: { xMm, zMm: 2200 } },
+    });
+    const one = enter(start(), -900);
+    expect(diffDocuments(start(), one, start())).toEqual([
+      expect.objectContaining({
+        id: 'asked:entrance',
+        label: 'Where people come in',
+        base: undefined,
+        mine: { xMm: -900, zMm: 2200 },
+        changedBy: 'mine',
+        conflict: false,
+      }),
+    ]);
+    expect(merged(start(), one, start(), {}).document.asked.entrance).toEqual({ xMm: -900, zMm: 2200 });
+    expect(merged(start(), start(), one, {}).document.asked.entrance).toEqual({ xMm: -900, zMm: 2200 });
+    const [mine, theirs] = [enter(start(), 0), enter(start(), 400)];
+    expect(mergeDocuments(one, mine, theirs, {})).toMatchObject({
+      ok: false,
+      error: { undecided: ['asked:entrance'] },
+    });
+    const chosen = merged(one, mine, theirs, { 'asked:entrance': 'mine' });
+    expect(chosen.document.asked.entrance).toEqual({ xMm: 0, zMm: 2200 });
+    // Taken away here and left alone there: it is gone, and not an empty value.
+    expect(merged(one, start(), one, {}).document.asked).not.toHaveProperty('entrance');
+  });
+
   it('chooses nothing by itself', () => {
     const mine = set(start(), 'b1', 'seatDepthMm', 430);
     const theirs = set(start(), 'b1', 'seatDepthMm', 460);
