@@ -16,9 +16,15 @@ const STEPS = 4;
  * @param title - of the view
  * @param at - upper left corner, millimetres of the real thing
  * @param sheet - scale and units
+ * @param leftOut - what the drawing does not show, where anything is left out
  * @returns lines and words for the foot of a drawing
  */
-export function barScale(title: string, at: PagePoint, { view, style, letterMm }: SheetOf): DrawnBeside {
+export function barScale(
+  title: string,
+  at: PagePoint,
+  { view, style, letterMm }: SheetOf,
+  leftOut?: string,
+): DrawnBeside {
   const steps = style.system === 'millimetres' ? METRIC_STEPS : INCH_STEPS;
   const step =
     steps.find((mm) => (mm * STEPS) / view.scale >= SHORTEST_ON_PAPER_MM) ?? steps.at(-1) ?? MM_PER_FOOT;
@@ -48,7 +54,7 @@ export function barScale(title: string, at: PagePoint, { view, style, letterMm }
       words([x, y], title, letterMm * 1.35, 'start'),
       words(
         [x, y + 1.9 * letterMm],
-        `Scale ${scaleWords(style.system, view.scale)}. Sizes govern.`,
+        `Scale ${scaleWords(style.system, view.scale)}. Sizes govern.${leftOut ? ` ${leftOut}.` : ''}`,
         letterMm,
         'start',
       ),

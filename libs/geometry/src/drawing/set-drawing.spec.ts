@@ -2,6 +2,7 @@ import { describe, expect, it } from 'vitest';
 import { ARRANGEMENTS } from '../room/arrangements.ts';
 import type { PieceOf } from '../room/document.ts';
 import { wordsWidth, type DrawnWords } from './drawn.ts';
+import { hiddenWords } from './hidden-words.ts';
 import { setDrawing } from './set-drawing.ts';
 import { VIEW_DIRECTIONS, type SetView } from './set-view.ts';
 
@@ -41,6 +42,29 @@ describe('drawing of a set', () => {
         expect(one.at[1]).toBeLessThanOrEqual(boundsMm.y + boundsMm.height + 1e-6);
       });
     }
+  });
+
+  it('leaves out what is hidden, and says so on the sheet', () => {
+    const document = built('facing-benches');
+    const hide = (marks: readonly string[]) => ({
+      ...document,
+      pieces: document.pieces.map((piece) => ({ ...piece, hidden: marks.includes(piece.mark) })),
+    });
+    const drawn = setDrawing(hide(['T1']), view, style);
+    const table = document.pieces.find(({ mark }) => mark === 'T1')!.id;
+    expect(setDrawing(document, view, style).lines.some(({ pieceId }) => pieceId === table)).toBe(true);
+    expect(drawn.lines.some(({ pieceId }) => pieceId === table)).toBe(false);
+    expect(drawn.words.some(({ text, layer }) => layer === 'mark' && text === 'T1')).toBe(false);
+    expect(drawn.words.map(({ text }) => text)).toContainEqual(
+      expect.stringMatching(/Sizes govern\. 1 piece hidden: T1\.$/),
+    );
+    expect(hiddenWords(hide(['B1', 'B2', 'T1']))).toBe('3 pieces hidden: B1, B2 and T1');
+    const many = { ...document, pieces: [...document.pieces, ...document.pieces, ...document.pieces] };
+    const all = { ...many, pieces: many.pieces.map((piece) => ({ ...piece, hidden: true })) };
+    expect(hiddenWords(all)).toMatch(
+      new RegExp(`^${many.pieces.length} pieces hidden: .* and ${many.pieces.length - 6} more$`),
+    );
+    expect(hiddenWords(document)).toBeUndefined();
   });
 
   it('writes dimensions that add up to what they span, at the table its own', () => {

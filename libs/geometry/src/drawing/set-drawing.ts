@@ -12,6 +12,7 @@ import {
   type DrawnWords,
   type PieceParts,
 } from './drawn.ts';
+import { hiddenWords } from './hidden-words.ts';
 import { boxAround, type Box } from './page-box.ts';
 import type { PageArc } from './line-tracks.ts';
 import { pinnedLines } from './pinned-lines.ts';
@@ -65,7 +66,8 @@ function byPiece(document: SetDocument, parts: readonly Part[]): PieceParts[] {
 }
 
 /**
- * Draws a set square from one side or cut, with dimensions, marks, title and a bar scale.
+ * Draws a set square from one side or cut, with dimensions, marks, title and a bar scale. Pieces that are hidden are
+ * left out, and the sheet says which.
  *
  * @param document - the set
  * @param view - from where, cut where, hidden lines, scale
@@ -74,7 +76,8 @@ function byPiece(document: SetDocument, parts: readonly Part[]): PieceParts[] {
  */
 export function setDrawing(document: SetDocument, view: SetView, style: LengthStyle): SetDrawing {
   const overhead = new Set(document.pieces.filter(({ kind }) => kind === 'overhead').map(({ id }) => id));
-  const parts = deriveParts(document);
+  const unseen = new Set(document.pieces.filter(({ hidden }) => hidden).map(({ id }) => id));
+  const parts = deriveParts(document).filter(({ pieceId }) => !unseen.has(pieceId));
   const seen = seenLines(parts, view, (id) => overhead.has(id));
   const lines = seen.lines.map(({ from, to, what }): DrawnLine => ({
     from,
@@ -100,7 +103,7 @@ export function setDrawing(document: SetDocument, view: SetView, style: LengthSt
     ...[...dimensions.words, ...marks.words, ...pinned.words].map(({ at }) => at[1] + letterMm),
     ...dimensions.lines.flatMap(({ from, to }) => [from[1], to[1]]),
   );
-  const bar = barScale(title, [setBoundsMm.x, low + 2.5 * letterMm], sheet);
+  const bar = barScale(title, [setBoundsMm.x, low + 2.5 * letterMm], sheet, hiddenWords(document));
   const all: Omit<SetDrawing, 'boundsMm'> = {
     title,
     view,

@@ -1,3 +1,4 @@
+export { hiddenWords } from '../drawing/hidden-words.ts';
 export { setDrawing, type SetDrawing } from '../drawing/set-drawing.ts';
 export type { DrawnArc, DrawnLine, DrawnWords, Layer } from '../drawing/drawn.ts';
 export { dxfOf } from './dxf.ts';

@@ -70,6 +70,20 @@ it('shows a section where it is asked for, and none that cannot be read', async 
   expect(screen.getByRole('button', { name: 'Save' })).toBeDisabled();
 });
 
+it('leaves hidden pieces out of every file, and says which', async () => {
+  const pieces = benches.pieces.map((piece) => (piece.mark === 'T1' ? { ...piece, hidden: true } : piece));
+  open({ ...benches, pieces });
+  const told = '1 piece hidden: T1; left out of the file.';
+  expect(screen.getByRole('status')).toHaveTextContent(told);
+  for (const file of [/PNG/, /glTF/, /SVG/]) {
+    await choose(/^File/, file);
+    expect(screen.getByRole('status')).toHaveTextContent(told);
+  }
+  fireEvent.click(screen.getByRole('button', { name: 'Save' }));
+  await waitFor(() => expect(kept).toHaveLength(1));
+  expect(await kept[0]!.blob.text()).toContain('1 piece hidden: T1.');
+});
+
 it('prints no more sheets than anybody joins', async () => {
   const [first, ...others] = benches.pieces;
   open({ ...benches, pieces: [{ ...first!, at: { ...first!.at, xMm: 40_000 } }, ...others] });

@@ -5,7 +5,7 @@ import {
   type SetView,
   type ViewDirection,
 } from '@settlewright/geometry';
-import { dxfOf, setDrawing, svgOf } from '@settlewright/geometry/export';
+import { dxfOf, hiddenWords, setDrawing, svgOf } from '@settlewright/geometry/export';
 import { useMemo, useState } from 'react';
 import { Button } from '@/components/button.tsx';
 import { Dialog } from '@/components/dialog.tsx';
@@ -89,6 +89,7 @@ export default function SaveDrawing({ onClose }: { onClose: () => void }) {
   const version = issued
     ? `Revision ${issued.letter}, issued ${dateWords(issued.issuedAt)}`
     : `Draft, ${todayWords()}`;
+  const hidden = hiddenWords(set);
   const sectionMm = isCut ? (cut.value ?? undefined) : undefined;
   const view = useMemo(
     (): SetView => ({ direction, sectionMm, hidden: dashed ? 'dashed' : 'left-out', scale }),
@@ -109,7 +110,9 @@ export default function SaveDrawing({ onClose }: { onClose: () => void }) {
       case 'dxf':
         return dxfOf(drawing, style.system === 'millimetres' ? 'millimetres' : 'inches');
       case 'pdf': {
-        const words = { setName, version, style };
+        // A drawing says on itself what is hidden; a picture has the line under it for that.
+        const said = !isDrawing && hidden ? `${version}; ${hidden}` : version;
+        const words = { setName, version: said, style };
         const texts = [
           setName,
           ...(isDrawing ? drawing.words : []).map(({ text }) => text),
@@ -250,6 +253,7 @@ export default function SaveDrawing({ onClose }: { onClose: () => void }) {
               !shots[0] &&
               'The scene as it stands on the screen, with the bodies shown there; no tapes, no names.'}
             {kind === 'glb' && 'In metres, without bodies.'}
+            {hidden && ` ${hidden}; left out of the file.`}
           </p>
           <div className="flex flex-wrap gap-3">
             <Button

@@ -31,6 +31,15 @@ describe('glTF model of a set', () => {
     },
   );
 
+  it('leaves out what is hidden', async () => {
+    const document = ARRANGEMENTS.find(({ id }) => id === 'facing-benches')!.build();
+    const pieces = document.pieces.map((piece) => ({ ...piece, hidden: piece.mark === 'T1' }));
+    const glb = await glbOf({ ...document, pieces }, deriveParts(document), tones, 'A set');
+    const names = jsonOf(glb).nodes.map(({ name }) => name);
+    expect(names).toContain('B1');
+    expect(names).not.toContain('T1');
+  });
+
   it('is in metres: a table of 29″ ends 0.7366 m over the floor', async () => {
     const document = ARRANGEMENTS.find(({ id }) => id === 'facing-benches')!.build();
     const pieces = document.pieces.filter(({ kind }) => kind === 'table');

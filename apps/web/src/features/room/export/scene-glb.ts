@@ -25,6 +25,7 @@ function sceneOf(
     return material;
   });
   for (const piece of document.pieces) {
+    if (piece.hidden) continue;
     const group = new Group();
     group.name = piece.mark;
     MATERIALS.forEach((key, n) => {
@@ -47,7 +48,7 @@ function sceneOf(
   return scene;
 }
 
-/** The pieces of a set as a binary glTF, without bodies: those are personal. */
+/** The pieces of a set that are not hidden as a binary glTF, without bodies: those are personal. */
 export async function glbOf(
   document: SetDocument,
   parts: readonly Part[],
