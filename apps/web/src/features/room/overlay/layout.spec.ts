@@ -39,6 +39,23 @@ describe('names above the heads', () => {
     for (const name of placeNames(frame, viewport, heads))
       expect(name.x + 45).toBeLessThanOrEqual(794 + 1e-6);
   });
+
+  it('take further rows where one is too short, and stay on the sheet', () => {
+    const heads = Array.from({ length: 14 }, (_, n) => ({
+      id: `p${n}`,
+      headMm: [n * 120 - 800, 300, 0] as const,
+      width: 110,
+      height: 16,
+    }));
+    const placed = placeNames(frame, viewport, heads);
+    expect(new Set(placed.map((name) => name.id)).size).toBe(14);
+    for (const name of placed) {
+      expect(name.x - 55).toBeGreaterThanOrEqual(6 - 1e-6);
+      expect(name.x + 55).toBeLessThanOrEqual(794 + 1e-6);
+      for (const other of placed)
+        expect(other === name || other.y !== name.y || Math.abs(other.x - name.x) >= 128 - 1e-6).toBe(true);
+    }
+  });
 });
 
 describe('tape flags', () => {

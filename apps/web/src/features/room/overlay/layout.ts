@@ -49,12 +49,13 @@ export interface Blob {
 }
 
 const NAME_GAP = 18;
+const NAME_ROW = 20;
 const NAME_ABOVE_HEADS = 46;
 const EDGE = 6;
 const HEAD_WIDTH_MM = 160;
 const HEAD_HEIGHT_MM = 240;
 
-/** Puts names into one row, in the order of their heads so that no leader crosses another. */
+/** Puts names into one row, or into several where one is too short, in the order of their heads so that no leader crosses another. */
 export function placeNames(
   frame: ViewFrame,
   viewport: Viewport,
@@ -65,8 +66,27 @@ export function placeNames(
     .filter(({ head }) => head.x > EDGE && head.x < viewport.width - EDGE)
     .sort((a, b) => a.head.x - b.head.x);
   if (heads.length === 0) return [];
+  const words = heads.reduce((sum, { name }) => sum + name.width + NAME_GAP, -NAME_GAP);
+  const rows = Math.max(1, Math.ceil(words / Math.max(1, viewport.width - 2 * EDGE)));
   const highest = Math.min(...heads.map(({ head }) => head.y));
-  const y = Math.max(14, Math.min(highest - NAME_ABOVE_HEADS, viewport.height - 20));
+  const first = Math.min(highest - NAME_ABOVE_HEADS, viewport.height - 20);
+  const y = Math.max(14 + (rows - 1) * NAME_ROW, first);
+  // Who does not find room in one row stands in turns in the rows above it.
+  return Array.from({ length: rows }, (_, row) =>
+    rowOf(
+      heads.filter((_head, n) => n % rows === row),
+      viewport.width,
+      y - row * NAME_ROW,
+    ),
+  ).flat();
+}
+
+interface Head {
+  name: NameToPlace;
+  head: ScreenPoint;
+}
+
+function rowOf(heads: readonly Head[], width: number, y: number): PlacedName[] {
   const left: number[] = [];
   let edge = EDGE;
   for (const { name, head } of heads) {
@@ -74,10 +94,10 @@ export function placeNames(
     left.push(at);
     edge = at + name.width + NAME_GAP;
   }
-  let limit = viewport.width - EDGE;
+  let limit = width - EDGE;
   for (let n = heads.length - 1; n >= 0; n--) {
-    const width = heads[n]?.name.width ?? 0;
-    left[n] = Math.min(left[n] ?? 0, limit - width);
+    const wide = heads[n]?.name.width ?? 0;
+    left[n] = Math.max(EDGE, Math.min(left[n] ?? 0, limit - wide));
     limit = (left[n] ?? 0) - NAME_GAP;
   }
   return heads.map(({ name, head }, n) => ({
