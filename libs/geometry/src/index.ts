@@ -67,6 +67,7 @@ export { planOf, type PlanOptions } from './drawing/plan.ts';
 export { frontOf } from './drawing/front.ts';
 export { askedShapes } from './drawing/asked.ts';
 export { sectionOf } from './drawing/section.ts';
+export { roomCutFaces, type RoomCutFace } from './drawing/room-cut-faces.ts';
 export * from './drawing/drawing-scale.ts';
 export { VIEW_DIRECTIONS, type SetView, type ViewDirection } from './drawing/set-view.ts';
 export { cushionDrawing, type CushionDrawing } from './drawing/cushion-drawing.ts';

@@ -15,7 +15,9 @@ import { Overlay } from '../overlay/overlay.tsx';
 import { tapesAtRest } from '../overlay/tape-words.ts';
 import type { RoomPicture } from '../picture.ts';
 import { useSurroundings } from '../room-context.tsx';
-import { isBehind, isToScale } from '../scene/views.ts';
+import { isBehind, isBodyLeft, isToScale } from '../scene/views.ts';
+import { SectionBar } from '../section/section-bar.tsx';
+import { SectionOnScene } from '../section/section-on-scene.tsx';
 import { useRoom } from '../store.ts';
 import { LensMask } from '../views/lens-mask.tsx';
 import { LensOnPlan } from '../views/lens-on-plan.tsx';
@@ -97,7 +99,7 @@ export function SceneStage({ picture, piece, address, actions, several, onOpenCe
           ({ kind, fromMm }) => kind !== 'gap' || isBehind(fromMm, view.cut),
         )
       : [];
-  const bodies = showBodies ? picture.bodies.filter((body) => isBehind(body.crownMm, view.cut)) : [];
+  const bodies = showBodies ? picture.bodies.filter((body) => isBodyLeft(body.crownMm, view.cut)) : [];
 
   const measuring = useMeasuringScene(picture);
   const measures = useMeasures(picture, measuring);
@@ -197,6 +199,7 @@ export function SceneStage({ picture, piece, address, actions, several, onOpenCe
         )}
         <WayOnScene controller={view.controller} style={style} />
         {!clientView && <GapsOnScene controller={view.controller} style={style} />}
+        <SectionOnScene picture={picture} controller={view.controller} />
         {view.lensBox && <LensMask box={view.lensBox} />}
         {letter === 'D' && seen.lens && (
           <LensOnPlan controller={view.controller} lens={seen.lens} style={style} />
@@ -212,11 +215,13 @@ export function SceneStage({ picture, piece, address, actions, several, onOpenCe
       <StageTools
         address={address}
         view={view}
+        letter={letter}
         choosing={several?.choosing}
         bodies={seen.bodies}
         // Whoever sees verdicts alone may have none to show.
         tapes={tapes.length > 0 && !clientView ? seen.tapes : undefined}
       />
+      <SectionBar picture={picture} />
       {!clientView && <TapeBar scene={measuring} />}
       <TextTwin
         id={about}

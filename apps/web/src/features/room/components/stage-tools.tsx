@@ -1,12 +1,15 @@
 import type { RoomAddress } from '../hooks/use-address.ts';
 import type { Choosing } from '../hooks/use-choosing.ts';
 import type { View } from '../hooks/use-view.ts';
+import { SectionToggle } from '../section/section-bar.tsx';
+import type { SceneView } from '../scene/views.ts';
 import { TapeToggle } from '../tape-tool/tape-bar.tsx';
 import { Toggle } from './toggle.tsx';
 
 interface Props {
   address: RoomAddress;
   view: View;
+  letter: SceneView;
   /** Left out where only one piece can be looked at. */
   choosing: Choosing | undefined;
   bodies: { shown: boolean; show: (shown: boolean) => void };
@@ -15,7 +18,7 @@ interface Props {
 }
 
 /** The row under the drawing: what is shown on it, and how large. */
-export function StageTools({ address, view, choosing, bodies, tapes }: Props) {
+export function StageTools({ address, view, letter, choosing, bodies, tapes }: Props) {
   return (
     <div className="flex flex-wrap items-center justify-end gap-x-5 gap-y-1 py-1.5 text-sm text-ink-2">
       {choosing && (
@@ -32,6 +35,7 @@ export function StageTools({ address, view, choosing, bodies, tapes }: Props) {
         </Toggle>
       )}
       {!address.clientView && <TapeToggle />}
+      <SectionToggle letter={letter} />
       <Toggle on={address.clientView} onChange={address.setClientView}>
         Client view
       </Toggle>

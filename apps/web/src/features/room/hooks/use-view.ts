@@ -55,8 +55,12 @@ export function useView(
   letter: SceneView,
   selectedPieceId: string | undefined,
   sheet: RefObject<HTMLElement | null>,
-  /** The named view that is looked through, and the lens that has to be seen on the plan. */
-  { named, lens }: { named: NamedView | undefined; lens: { id: string } | undefined },
+  /** The named view that is looked through, the lens that has to be seen on the plan, and the cut of the set. */
+  {
+    named,
+    lens,
+    section,
+  }: { named: NamedView | undefined; lens: { id: string } | undefined; section: Cut | undefined },
 ): View {
   const [controller] = useState(createViewController);
   const [size, setSize] = useState({ width: 0, height: 0 });
@@ -74,8 +78,8 @@ export function useView(
     return union(shown, { min: at, max: at });
   }, [picture, selectedPieceId, narrow, onPlan]);
   const cut = useMemo(
-    () => named?.section ?? (letter === 'C' ? cutThrough(piece ?? document.pieces[0], parts) : undefined),
-    [named, letter, piece, document, parts],
+    () => section ?? (letter === 'C' ? cutThrough(piece ?? document.pieces[0], parts) : undefined),
+    [section, letter, piece, document, parts],
   );
 
   useLayoutEffect(() => {

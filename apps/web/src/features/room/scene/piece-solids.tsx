@@ -3,6 +3,7 @@ import type { BufferGeometry } from 'three';
 import type { RoomPicture } from '../picture';
 import { linesOf } from './ink-lines';
 import type { SceneMaterials } from './shaders';
+import { printsByPiece } from './seat-print';
 import { mergeParts, surfaceOf } from './solids';
 import { visibleParts } from './visible-parts';
 import type { SceneView } from './views';
@@ -16,15 +17,24 @@ interface Props {
   picture: RoomPicture;
   letter: SceneView;
   chosenIds: readonly string[];
+  /** Cushions are pressed in by bodies that are shown. */
+  showBodies: boolean;
   materials: SceneMaterials;
 }
 
 /** All pieces in a handful of draw calls; the chosen ones are drawn apart for their outline. */
-export function PieceSolids({ picture, letter, chosenIds, materials }: Props) {
+export function PieceSolids({ picture, letter, chosenIds, showBodies, materials }: Props) {
   const made = useMemo(() => {
     const parts = visibleParts(picture.document, picture.parts, letter);
-    const others = mergeParts(parts.filter((part) => !chosenIds.includes(part.pieceId)));
-    const chosen = mergeParts(parts.filter((part) => chosenIds.includes(part.pieceId)));
+    const printsOn = printsByPiece(showBodies ? picture.bodies : []);
+    const others = mergeParts(
+      parts.filter((part) => !chosenIds.includes(part.pieceId)),
+      printsOn,
+    );
+    const chosen = mergeParts(
+      parts.filter((part) => chosenIds.includes(part.pieceId)),
+      printsOn,
+    );
     return {
       others: surfaceOf(others.positions, others.normals, others.materials),
       chosen: surfaceOf(chosen.positions, chosen.normals, chosen.materials),
@@ -38,7 +48,7 @@ export function PieceSolids({ picture, letter, chosenIds, materials }: Props) {
         [...others.roundNormals, ...chosen.roundNormals],
       ),
     };
-  }, [picture, letter, chosenIds]);
+  }, [picture, letter, chosenIds, showBodies]);
   useDispose(made);
 
   return (

@@ -4,6 +4,7 @@ import { OrthographicCamera } from 'three';
 import { offerStill, type Taker } from '../export/still';
 import type { RoomPicture } from '../picture';
 import { BodyFigures } from './body-figures';
+import { CutCaps } from './cut-caps';
 import { followView } from './follow-view';
 import { Ground } from './ground';
 import { PieceSolids } from './piece-solids';
@@ -141,6 +142,7 @@ function Stage({
     <group scale={METRES}>
       <Ground picture={picture} letter={letter} materials={materials} />
       <PieceSolids picture={picture} letter={letter} chosenIds={chosenIds} materials={materials} />
+      {cut && <CutCaps picture={picture} letter={letter} cut={cut} materials={materials} />}
       {showBodies && (
         <BodyFigures picture={picture} palette={palette} shared={shared} materials={materials} />
       )}

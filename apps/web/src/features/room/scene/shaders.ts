@@ -127,6 +127,8 @@ const BODY_FRAGMENT = /* glsl */ `
     float facing = abs(dot(n, normalize(uEye.xyz - vRoom * uEye.w)));
     float inside = facing / max(fwidth(facing), 1e-5);
     colour = mix(uPen, colour, smoothstep(1.2, 2.4, inside));
+    // The inside of a body shows where a section has opened it: flat, as if it were solid.
+    if (!gl_FrontFacing) colour = mix(uColour, uPen, 0.3);
     gl_FragColor = vec4(colour, 1.0);
   }`;
 
@@ -208,6 +210,7 @@ export function createMaterials(shared: SharedUniforms) {
       stencilZPass: ReplaceStencilOp,
     }),
     edges: new ShaderMaterial(line(1.1, shared.uPen.value)),
+    cutEdges: new ShaderMaterial(line(3, shared.uPen.value)),
     /** Twice as wide as it shows: its inner half lies on the piece itself and is left out. */
     outline: new ShaderMaterial({
       ...line(6, chosenInk),

@@ -1,5 +1,8 @@
 import type { MaterialKey, Part, Solid, Vec3 } from '@settlewright/geometry';
 import { BufferAttribute, BufferGeometry, ShapeUtils, Vector2 } from 'three';
+import { addCushion, isCushion } from './cushion-solid';
+import type { SeatPrint } from './seat-print';
+import type { SolidArrays } from './solid-arrays';
 import { add, normalise, partAxes, scale } from './vectors';
 
 /** Order of the materials in the palette of the shaders. */
@@ -8,18 +11,6 @@ export const MATERIALS: readonly MaterialKey[] = ['oak', 'walnut', 'cloth', 'wal
 /** How strongly an edge is inked: 1 is the edge of a piece, less is a seam between boards. */
 const SEAMS: Partial<Record<Part['role'], number>> = { 'wall-board': 0.17, 'back-board': 0.4 };
 const ROUND_SIDES = 32;
-
-export interface SolidArrays {
-  positions: number[];
-  normals: number[];
-  materials: number[];
-  /** Ends of straight edges, six numbers a segment. */
-  edges: number[];
-  edgeWeights: number[];
-  /** Triangles of round parts again, for an outline that no straight edge can give. */
-  roundPositions: number[];
-  roundNormals: number[];
-}
 
 type Place = (x: number, y: number, z: number) => Vec3;
 
@@ -113,8 +104,14 @@ function addPrism(out: SolidArrays, part: Part, solid: Extract<Solid, { shape: '
   });
 }
 
-/** Merges parts into one list of triangles and one of edges: a few draw calls for the whole set. */
-export function mergeParts(parts: readonly Part[]): SolidArrays {
+/**
+ * Merges parts into one list of triangles and one of edges: a few draw calls for the whole set.
+ * Seats are pressed in by those who sit on their piece.
+ */
+export function mergeParts(
+  parts: readonly Part[],
+  printsOn: (pieceId: string) => readonly SeatPrint[] = () => [],
+): SolidArrays {
   const out: SolidArrays = {
     positions: [],
     normals: [],
@@ -127,7 +124,8 @@ export function mergeParts(parts: readonly Part[]): SolidArrays {
   for (const part of parts) {
     const material = MATERIALS.indexOf(part.material);
     const weight = SEAMS[part.role] ?? 1;
-    if (part.solid.shape === 'box') addBox(out, part, part.solid.sizeMm, material, weight);
+    if (isCushion(part)) addCushion(out, part, material, printsOn(part.pieceId));
+    else if (part.solid.shape === 'box') addBox(out, part, part.solid.sizeMm, material, weight);
     else if (part.solid.shape === 'cylinder') {
       addCylinder(out, part, part.solid.radiusMm, part.solid.heightMm, material);
     } else addPrism(out, part, part.solid, material);

@@ -32,6 +32,10 @@ export interface Cut {
 export const isBehind = (point: Vec3, cut: Cut | undefined): boolean =>
   cut === undefined || dot(subtract(point, cut.pointMm), cut.toward) <= 40;
 
+/** Whether somebody keeps a name in the drawing: a level cut opens people, it takes none away. */
+export const isBodyLeft = (crownMm: Vec3, cut: Cut | undefined): boolean =>
+  (cut !== undefined && cut.toward[1] > 0.9) || isBehind(crownMm, cut);
+
 export interface Insets {
   top: number;
   right: number;
@@ -67,7 +71,8 @@ function orientationOf(request: ViewRequest): Quat {
     case 'B':
       return facing([-1, 0, 0]);
     case 'C':
-      return facing(request.cut?.toward ?? [0, 0, 1]);
+      // A level cut has no front: it is seen as the room is.
+      return facing(request.cut && Math.abs(request.cut.toward[1]) < 0.9 ? request.cut.toward : [0, 0, 1]);
     case 'D':
       return fromAxes([1, 0, 0], [0, 0, -1], UP);
     case 'E': {

@@ -2,7 +2,9 @@ import type { LensCamera, NamedView, SetDocument } from '@settlewright/geometry'
 import { useEffect, useState } from 'react';
 import type { RoomAddress } from '../hooks/use-address.ts';
 import type { Hand } from '../hooks/use-view.ts';
+import { useSurroundings } from '../room-context.tsx';
 import { VIEW_TITLES, type Cut, type SceneView } from '../scene/views.ts';
+import { useSectionCut } from '../section/section-store.ts';
 import { offerPresentView } from './present-view.ts';
 
 const DEG = Math.PI / 180;
@@ -14,6 +16,8 @@ export interface Seen {
   named: NamedView | undefined;
   /** A lens that is worked on while another view shows it on the plan. */
   lens: { id: string; camera: LensCamera } | undefined;
+  /** Where the hand or the named view cuts the set. */
+  section: Cut | undefined;
   bodies: { shown: boolean; show: (shown: boolean) => void };
   tapes: { shown: boolean; show: (shown: boolean) => void };
 }
@@ -32,11 +36,13 @@ export function useSeen(document: SetDocument, address: RoomAddress): Seen {
       showTapes(named.shown.tapes);
     }
   }
+  const section = useSectionCut(useSurroundings().path.setId, named);
   const camera = chosen?.camera;
   return {
     letter: !named ? address.view : named.camera.kind === 'lens' ? 'lens' : named.camera.letter,
     named,
     lens: chosen && camera?.kind === 'lens' ? { id: chosen.id, camera } : undefined,
+    section,
     bodies: { shown: bodies, show: showBodies },
     tapes: { shown: tapes, show: showTapes },
   };

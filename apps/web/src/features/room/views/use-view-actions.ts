@@ -76,7 +76,7 @@ export function useViewActions(address: RoomAddress): ViewActions {
         if (!present) return;
         const { camera, shown, section } = present;
         commit(
-          changeView(now(), view.id, { camera, shown, ...(section && { section }) }),
+          changeView(now(), view.id, { camera, shown, section }),
           `View “${view.name}” kept as seen now`,
         );
       },
