@@ -69,6 +69,7 @@ export function sayValue(difference: DocumentDifference, side: Side | 'base', wo
     const { pieces } = words.documents[side];
     return joinWords(pieces.filter(({ id }) => pieceIds.includes(id)).map(({ mark }) => mark));
   }
+  if (kind === 'dimension') return 'pinned';
   if (key === 'leaves') return sayLeaves(value, words.style);
   if (kind === 'view') {
     const { name, camera } = value as NamedView;
