@@ -141,7 +141,13 @@ function Stage({
   return (
     <group scale={METRES}>
       <Ground picture={picture} letter={letter} materials={materials} />
-      <PieceSolids picture={picture} letter={letter} chosenIds={chosenIds} materials={materials} />
+      <PieceSolids
+        picture={picture}
+        letter={letter}
+        chosenIds={chosenIds}
+        showBodies={showBodies}
+        materials={materials}
+      />
       {cut && <CutCaps picture={picture} letter={letter} cut={cut} materials={materials} />}
       {showBodies && (
         <BodyFigures picture={picture} palette={palette} shared={shared} materials={materials} />

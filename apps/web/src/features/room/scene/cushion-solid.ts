@@ -1,0 +1,152 @@
+import type { Part, Vec3 } from '@settlewright/geometry';
+import { pressedBy, type SeatPrint } from './seat-print.ts';
+import type { SolidArrays } from './solid-arrays.ts';
+import { add, cross, dot, normalise, partAxes, scale, subtract } from './vectors.ts';
+
+/** Edge of the cover, its crown over the panel and the width over which the crown rises, mm. */
+const ROUND_MM = 20;
+const CROWN_MM = 9;
+const CROWN_RUN_MM = 150;
+/** Distance of the lines of a panel: close where somebody sits on it, mm. */
+const PRESSED_STEP_MM = 32;
+const FREE_STEP_MM = 240;
+/** A pressed panel stays so far over the deck, mm. */
+const LEAST_MM = 8;
+const ROUNDING = [1, 0.92, 0.6, 0] as const;
+
+type Sheet = Vec3[][];
+
+const isSoft = ({ role }: Part): boolean => role === 'seat-cushion' || role === 'back-cushion';
+
+/** A cushion that is drawn soft. */
+export const isCushion = (part: Part): part is Part & { solid: { shape: 'box'; sizeMm: Vec3 } } =>
+  isSoft(part) && part.solid.shape === 'box';
+
+/** Lines across a panel of half width `half`: close at the rounded edges. */
+function lines(half: number, round: number, step: number): number[] {
+  const edge = ROUNDING.map((share) => half - round * (1 - share));
+  const shoulder = [half - round - 40, half - round - 100].filter((at) => at > step / 2);
+  const inner = shoulder.at(-1) ?? half - round;
+  const count = Math.max(1, Math.ceil((2 * inner) / step));
+  const between = Array.from({ length: count - 1 }, (_, n) => inner - ((n + 1) * 2 * inner) / count);
+  const outer = [...edge, ...shoulder];
+  return [...outer.map((at) => -at), ...between, ...outer].sort((a, b) => a - b);
+}
+
+/** Normal of each point of a sheet, from the points next to it. */
+function normalsOf(sheet: Sheet): Sheet {
+  const at = (row: number, column: number): Vec3 => {
+    const points = sheet[Math.min(Math.max(row, 0), sheet.length - 1)] ?? [];
+    return points[Math.min(Math.max(column, 0), points.length - 1)] ?? [0, 0, 0];
+  };
+  return sheet.map((points, row) =>
+    points.map((_, column) =>
+      normalise(
+        cross(
+          subtract(at(row + 1, column), at(row - 1, column)),
+          subtract(at(row, column + 1), at(row, column - 1)),
+        ),
+      ),
+    ),
+  );
+}
+
+function addSheet(out: SolidArrays, sheet: Sheet, normals: Sheet, material: number) {
+  const start = out.positions.length;
+  for (let row = 0; row + 1 < sheet.length; row++) {
+    for (let column = 0; column + 1 < (sheet[row]?.length ?? 0); column++) {
+      for (const [r, c] of [
+        [row, column],
+        [row + 1, column],
+        [row + 1, column + 1],
+        [row, column],
+        [row + 1, column + 1],
+        [row, column + 1],
+      ] as const) {
+        out.positions.push(...(sheet[r]?.[c] ?? [0, 0, 0]));
+        out.normals.push(...(normals[r]?.[c] ?? [0, 1, 0]));
+        out.materials.push(material);
+      }
+    }
+  }
+  for (let n = start; n < out.positions.length; n++) {
+    out.roundPositions.push(out.positions[n] ?? 0);
+    out.roundNormals.push(out.normals[n] ?? 0);
+  }
+}
+
+/** Points round the rim of a panel, closed. */
+function rimOf(panel: Sheet): Vec3[] {
+  const first = panel[0] ?? [];
+  const last = panel.at(-1) ?? [];
+  const right = panel.slice(1, -1).map((row) => row.at(-1)!);
+  const left = panel.slice(1, -1).map((row) => row[0]!);
+  const round = [...first, ...right, ...[...last].reverse(), ...left.reverse()];
+  return [...round, round[0]!];
+}
+
+function addLoop(out: SolidArrays, loop: readonly Vec3[], weight: number) {
+  loop.slice(1).forEach((point, n) => {
+    out.edges.push(...loop[n]!, ...point);
+    out.edgeWeights.push(weight);
+  });
+}
+
+/**
+ * A cushion as it is upholstered: a crowned panel over a boxing with a welt between, all inside the measured box, and
+ * pressed in where somebody sits. The seat's panel looks up, the back's forwards.
+ */
+export function addCushion(
+  out: SolidArrays,
+  part: Part & { solid: { sizeMm: Vec3 } },
+  material: number,
+  prints: readonly SeatPrint[],
+) {
+  const [x, y, z] = partAxes(part.rotationRad);
+  const isSeat = part.role === 'seat-cushion';
+  const [width, height, depth] = part.solid.sizeMm;
+  const thick = isSeat ? height : depth;
+  const [a, b] = [width / 2, (isSeat ? depth : height) / 2];
+  const [outward, down]: [Vec3, Vec3] = isSeat ? [y, z] : [z, scale(y, -1)];
+  const round = Math.min(ROUND_MM, thick * 0.35, a * 0.4, b * 0.4);
+  const crown = Math.min(CROWN_MM, thick * 0.12);
+  const step = prints.length > 0 && isSeat ? PRESSED_STEP_MM : FREE_STEP_MM;
+  const place = (u: number, w: number, v: number): Vec3 =>
+    add(part.positionMm, add(add(scale(x, u), scale(outward, w)), scale(down, v)));
+
+  const panel: Sheet = lines(b, round, step).map((v) =>
+    lines(a, round, step).map((u) => {
+      const [eu, ev] = [
+        Math.max(0, Math.abs(u) - a + round) / round,
+        Math.max(0, Math.abs(v) - b + round) / round,
+      ];
+      const [du, dv] = [eu * Math.sqrt(1 - (ev * ev) / 2), ev * Math.sqrt(1 - (eu * eu) / 2)];
+      const inward = Math.min(a - Math.abs(u), b - Math.abs(v)) / CROWN_RUN_MM;
+      const sag = crown * (1 - Math.min(1, inward)) ** 2;
+      const rise = round * Math.sqrt(Math.max(0, 1 - du * du - dv * dv));
+      const top = thick / 2 - round + rise - sag;
+      const at: readonly [number, number] = [
+        eu > 0 ? Math.sign(u) * (a - round + round * du) : u,
+        ev > 0 ? Math.sign(v) * (b - round + round * dv) : v,
+      ];
+      const pressed = isSeat ? pressedBy(prints, place(at[0], top, at[1])) : 0;
+      return place(at[0], Math.max(LEAST_MM - thick / 2, top - pressed), at[1]);
+    }),
+  );
+  addSheet(out, panel, normalsOf(panel), material);
+
+  const rim = rimOf(panel);
+  const foot = rim.map((point) =>
+    add(point, scale(outward, -thick / 2 - dot(subtract(point, part.positionMm), outward))),
+  );
+  const sideways = rim.map((_, n) => {
+    const run = subtract(rim[n + 1] ?? rim[1]!, rim[n - 1] ?? rim.at(-2)!);
+    return normalise(cross(outward, run));
+  });
+  addSheet(out, [foot, rim], [sideways, sideways], material);
+  const under = foot.map(() => place(0, -thick / 2, 0));
+  const away = foot.map(() => scale(outward, -1));
+  addSheet(out, [under, foot], [away, away], material);
+  addLoop(out, rim, 1);
+  addLoop(out, foot, 1);
+}
