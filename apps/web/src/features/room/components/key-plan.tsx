@@ -113,10 +113,10 @@ export function KeyPlan({ picture, address }: Props) {
               points={footprint(piece)
                 .corners.map(([cx, cz]) => `${x(cx).toFixed(1)},${z(cz).toFixed(1)}`)
                 .join(' ')}
-              fill={FILLS[piece.kind]}
+              fill={piece.hidden ? 'none' : FILLS[piece.kind]}
               stroke={chosen.has(piece.id) ? 'var(--color-ink)' : 'var(--color-pen)'}
               strokeWidth={chosen.has(piece.id) ? 2.5 : 1}
-              strokeDasharray={piece.kind === 'overhead' ? '4 3' : undefined}
+              strokeDasharray={piece.kind === 'overhead' ? '4 3' : piece.hidden ? '2 3' : undefined}
             />
           ))}
           {dots.map((dot) => (

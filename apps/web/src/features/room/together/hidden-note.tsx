@@ -15,7 +15,7 @@ export function HiddenNote({ document, actions }: Props) {
   if (hidden.length === 0) return null;
   const marks = joinWords(hidden.map(({ mark }) => mark));
   return (
-    <p className="text-sm text-ink-2" data-hidden-note>
+    <p className="pb-2 text-sm text-ink-2" data-hidden-note>
       {hidden.length === 1 ? '1 piece' : `${hidden.length} pieces`} hidden, still measured: {marks}.{' '}
       {actions && (
         <Button look="word" onClick={() => actions.mark(hidden, 'hidden', false)}>

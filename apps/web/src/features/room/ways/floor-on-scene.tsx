@@ -3,8 +3,9 @@ import { useCallback, useEffect, useLayoutEffect, useRef } from 'react';
 import type { ViewController } from '../scene/view-controller.ts';
 import { project } from '../scene/view-frame.ts';
 import { FLOOR_WORDS } from './floor-words.ts';
+import { clearOfEachOther, type PlacedName } from './floor-names.ts';
 
-/** Names that would lie on one another are left to the list. */
+/** Kinds that are named in the drawing; the list names all. */
 const NAMED: readonly FloorShape['kind'][] = ['floor', 'approach', 'knee-space', 'turning-circle'];
 
 interface Props {
@@ -18,7 +19,8 @@ export function FloorOnScene({ controller, floor }: Props) {
   const layOut = useCallback(() => {
     const frame = controller.frame();
     if (!frame || !drawn.current) return;
-    floor.forEach(({ outline, heightsMm, kind }, n) => {
+    const named: (PlacedName & { text: Element })[] = [];
+    floor.forEach(({ outline, heightsMm, kind, blockedBy }, n) => {
       const heightMm = kind === 'knee-space' ? heightsMm[0] : 0;
       const points = outline.map(([x, z]) => {
         const point: Vec3 = [x, heightMm, z];
@@ -28,9 +30,14 @@ export function FloorOnScene({ controller, floor }: Props) {
       const [polygon, text] = group ? [...group.children] : [];
       polygon?.setAttribute('points', points.map(({ x, y }) => `${x.toFixed(1)},${y.toFixed(1)}`).join(' '));
       const mean = (values: number[]) => values.reduce((sum, value) => sum + value, 0) / values.length;
-      text?.setAttribute('x', mean(points.map(({ x }) => x)).toFixed(1));
-      text?.setAttribute('y', mean(points.map(({ y }) => y)).toFixed(1));
+      if (!text) return;
+      const [x, y] = [mean(points.map((point) => point.x)), mean(points.map((point) => point.y))];
+      text.setAttribute('x', x.toFixed(1));
+      text.setAttribute('y', y.toFixed(1));
+      named.push({ text, x, y, letters: text.textContent.length, first: blockedBy.length > 0 });
     });
+    const kept = clearOfEachOther(named);
+    for (const one of named) one.text.setAttribute('visibility', kept.has(one) ? 'visible' : 'hidden');
   }, [controller, floor]);
   useLayoutEffect(layOut);
   useEffect(() => controller.subscribe(layOut), [controller, layOut]);
