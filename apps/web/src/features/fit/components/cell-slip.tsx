@@ -1,7 +1,6 @@
 import { SOURCE_MARK_WORDS, whyFor, type FitCell } from '@settlewright/anthropometry';
 import type { CSSProperties } from 'react';
 import { classNames } from '@/components/class-names.ts';
-import { Measure } from '@/components/measure.tsx';
 import { Verdict } from '@/components/verdict.tsx';
 import { useFitView } from '../fit-view.ts';
 import { Doubt, Sums } from './cell-sums.tsx';
@@ -65,11 +64,7 @@ export function CellSlip({ cell, sitterName }: { cell: FitCell; sitterName: stri
           </p>
           {verdict && sums && <Doubt outcome={verdict} cell={cell} of={sitterName} />}
           {cell.side !== undefined && <p className="mt-2 text-sm text-ink-2">At the sitter’s {cell.side}.</p>}
-          {posture !== '' && (
-            <p className="mt-2 text-sm text-ink-2">
-              <Measure text={posture} />
-            </p>
-          )}
+          {posture !== '' && <p className="mt-2 text-sm text-ink-2">{posture}</p>}
           <SourceLine ruleId={cell.ruleId} />
         </div>
         {fixable && (

@@ -198,7 +198,7 @@ export function SceneStage({ picture, piece, address, actions, several, onOpenCe
           </Suspense>
         )}
         <WayOnScene controller={view.controller} style={style} />
-        {!clientView && <GapsOnScene controller={view.controller} style={style} />}
+        {!clientView && <GapsOnScene controller={view.controller} cut={view.cut} style={style} />}
         <SectionOnScene picture={picture} controller={view.controller} />
         {view.lensBox && <LensMask box={view.lensBox} />}
         {letter === 'D' && seen.lens && (

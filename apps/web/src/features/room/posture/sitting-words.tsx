@@ -1,7 +1,6 @@
 import { jointWarnings, readJointRanges, type JointWarning } from '@settlewright/geometry';
 import jointFile from '@settlewright/seed-data/joint-ranges.json';
 import { SOURCE_MARK_WORDS } from '@settlewright/anthropometry';
-import { Measure } from '@/components/measure.tsx';
 import type { SeatedBody } from '../picture.ts';
 import { useSurroundings } from '../room-context.tsx';
 import { useRoom } from '../store.ts';
@@ -37,14 +36,8 @@ export function SittingWords({ body }: { body: SeatedBody }) {
   const measuredAs = sayMeasuredAs(choice, style);
   return (
     <div>
-      <p data-sitting>
-        <Measure text={asSentence(words.join(', '))} />
-      </p>
-      {measuredAs !== '' && (
-        <p className="mt-1 text-ink-2">
-          <Measure text={measuredAs} />
-        </p>
-      )}
+      <p data-sitting>{asSentence(words.join(', '))}</p>
+      {measuredAs !== '' && <p className="mt-1 text-ink-2">{measuredAs}</p>}
       {warnings.map((warning) => (
         <p key={`${warning.joint} ${warning.motion} ${warning.side ?? ''}`} className="mt-1 text-tight">
           {asSentence(sayWarning(warning))}

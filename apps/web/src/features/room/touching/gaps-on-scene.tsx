@@ -1,9 +1,17 @@
-import { formatLength, type LengthStyle, type SitterGap, type Vec3 } from '@settlewright/geometry';
+import {
+  CONTACT_MM,
+  formatLength,
+  type LengthStyle,
+  type SitterGap,
+  type Vec3,
+} from '@settlewright/geometry';
 import { useCallback, useEffect, useLayoutEffect, useMemo, useRef } from 'react';
+import { classNames } from '@/components/class-names.ts';
 import { GapMark } from '@/components/verdict.tsx';
 import { Measure } from '@/components/measure.tsx';
 import type { ViewController } from '../scene/view-controller.ts';
 import { project } from '../scene/view-frame.ts';
+import { isBehind, type Cut } from '../scene/views.ts';
 import { outlineOf } from './outline.ts';
 import { useShownGaps } from './shown-gaps.ts';
 
@@ -13,9 +21,22 @@ const middle = ({ fromMm, toMm }: SitterGap): Vec3 => [
   (fromMm[2] + toMm[2]) / 2,
 ];
 
+interface Props {
+  controller: ViewController;
+  cut: Cut | undefined;
+  style: LengthStyle;
+}
+
 /** Over the drawing: a mark and its size where something overlaps, and a tape along the gap that is pointed at. */
-export function GapsOnScene({ controller, style }: { controller: ViewController; style: LengthStyle }) {
-  const { overlaps, lit, envelopes } = useShownGaps();
+export function GapsOnScene({ controller, cut, style }: Props) {
+  const shown = useShownGaps();
+  const { envelopes } = shown;
+  // What was cut away would be marked in the void.
+  const overlaps = useMemo(
+    () => shown.overlaps.filter((gap) => isBehind(middle(gap), cut)),
+    [shown.overlaps, cut],
+  );
+  const lit = shown.lit && isBehind(middle(shown.lit), cut) ? shown.lit : undefined;
   const layer = useRef<HTMLDivElement>(null);
   const marked = useMemo(
     () => (lit && !overlaps.includes(lit) ? [...overlaps, lit] : overlaps),
@@ -69,26 +90,40 @@ export function GapsOnScene({ controller, style }: { controller: ViewController;
           />
         ))}
         {lit && (
-          <path data-gap-line className={lit.distanceMm < 0 ? 'stroke-wont' : 'stroke-ink'} strokeWidth="3" />
+          <path
+            data-gap-line
+            className={lit.distanceMm < -CONTACT_MM ? 'stroke-wont' : 'stroke-ink'}
+            strokeWidth="3"
+          />
         )}
       </svg>
       {marked.map((gap, n) => (
-        <div
-          key={n}
-          data-gap
-          className={`absolute top-0 left-0 flex items-center gap-1.5 rounded-sm border-[1.25px] px-1.5 text-[0.84rem] leading-[1.35rem] whitespace-nowrap ${
-            gap.distanceMm < 0
-              ? gap === lit
-                ? 'border-wont bg-wont text-paper'
-                : 'border-wont bg-sheet text-wont'
-              : 'border-ink bg-sheet text-ink'
-          }`}
-        >
-          {gap.distanceMm < 0 && <GapMark verdict="wontFit" />}
-          {gap.distanceMm < 0 ? 'overlap ' : 'gap '}
-          <Measure text={formatLength(Math.abs(gap.distanceMm), style)} />
-        </div>
+        <GapFlag key={n} gap={gap} lit={gap === lit} style={style} />
       ))}
+    </div>
+  );
+}
+
+function GapFlag({ gap, lit, style }: { gap: SitterGap; lit: boolean; style: LengthStyle }) {
+  const inside = gap.distanceMm < -CONTACT_MM;
+  const overlapping = lit ? 'border-wont bg-wont text-paper' : 'border-wont bg-sheet text-wont';
+  return (
+    <div
+      data-gap
+      className={classNames(
+        'absolute top-0 left-0 flex items-center gap-1.5 rounded-sm border-[1.25px] px-1.5 text-[0.84rem] leading-[1.35rem] whitespace-nowrap',
+        inside ? overlapping : 'border-ink bg-sheet text-ink',
+      )}
+    >
+      {inside && <GapMark verdict="wontFit" />}
+      {Math.abs(gap.distanceMm) <= CONTACT_MM ? (
+        'touches'
+      ) : (
+        <>
+          {inside ? 'overlap ' : 'gap '}
+          <Measure text={formatLength(Math.abs(gap.distanceMm), style)} />
+        </>
+      )}
     </div>
   );
 }

@@ -6,13 +6,12 @@ import {
 } from '@settlewright/geometry';
 import jointFile from '@settlewright/seed-data/joint-ranges.json';
 import { useEffect, useState } from 'react';
-import { Measure } from '@/components/measure.tsx';
 import { Toggle } from '../components/toggle.tsx';
 import type { RoomPicture } from '../picture.ts';
 import { choosePlace } from '../posture/chosen-place.ts';
 import { useSurroundings } from '../room-context.tsx';
 import { hideGaps, showGaps } from './shown-gaps.ts';
-import { isMeant, sayGap, sayThing } from './touch-words.ts';
+import { isMeant, meetings, sayGap, sayRests, sayThing, sayTouches, type Meeting } from './touch-words.ts';
 import { useDistances } from './use-distances.ts';
 
 const RANGES = readJointRanges(jointFile);
@@ -29,7 +28,9 @@ export function RoomRound({ picture, placeId }: Props) {
   const [envelopes, setEnvelopes] = useState(false);
   useEffect(
     () =>
-      showGaps({ overlaps: distances?.flatMap((one) => one.overlaps.filter((gap) => !isMeant(gap))) ?? [] }),
+      showGaps({
+        overlaps: distances?.flatMap((one) => inTheWayOf(one).map(({ deepest }) => deepest)) ?? [],
+      }),
     [distances],
   );
   useEffect(() => hideGaps, []);
@@ -60,13 +61,15 @@ export function RoomRound({ picture, placeId }: Props) {
       <p className="text-ink-3">
         Between the bodies as drawn and the parts; the seat and the back they rest on are left out. Guidance:
         no check reads it.{' '}
-        <Measure
-          text={`Solids stand for a body within ${style.system === 'millimetres' ? '10 mm' : '3/8″'} at raised elbows and shoulders, elsewhere within ${style.system === 'millimetres' ? '3 mm' : '1/8″'}.`}
-        />
+        {`Solids stand for a body within ${style.system === 'millimetres' ? '10 mm' : '3/8″'} at raised elbows and shoulders, elsewhere within ${style.system === 'millimetres' ? '3 mm' : '1/8″'}.`}
       </p>
     </div>
   );
 }
+
+/** What a sitter reaches into and does not rest on. */
+const inTheWayOf = ({ overlaps }: SitterDistances): Meeting[] =>
+  meetings(overlaps.filter((gap) => !isMeant(gap)));
 
 interface SitterProps {
   one: SitterDistances;
@@ -77,29 +80,20 @@ interface SitterProps {
 function Sitter({ one, picture, chosen }: SitterProps) {
   const { style } = useSurroundings();
   const name = picture.bodies.find(({ placeId }) => placeId === one.placeId)?.name ?? '';
-  const met = [...one.overlaps, ...one.contacts];
-  const rests = [...new Set(met.filter(isMeant).map((gap) => `${gap.segment} on ${sayThing(gap, picture)}`))];
-  const inTheWay = one.overlaps.filter((gap) => !isMeant(gap));
-  const touches = one.contacts.filter((gap) => !isMeant(gap));
+  const rests = sayRests([...one.overlaps, ...one.contacts].filter(isMeant), picture);
+  const touches = sayTouches(
+    one.contacts.filter((gap) => !isMeant(gap)),
+    picture,
+  );
   return (
     <li className={chosen ? 'border-l-2 border-ink pl-2' : 'pl-2.5'}>
       <p className="font-medium">{name}</p>
-      {inTheWay.map((gap) => (
-        <GapLine
-          key={`${gap.segment} ${sayThing(gap, picture)}`}
-          gap={gap}
-          placeId={one.placeId}
-          tone="text-wont"
-        >
-          {sayGap(gap, picture, style)}
+      {inTheWayOf(one).map(({ deepest, also }) => (
+        <GapLine key={sayThing(deepest, picture)} gap={deepest} placeId={one.placeId} tone="text-wont">
+          {sayGap(deepest, picture, style) + (also.length > 0 ? `; also ${also.join(', ')}` : '')}
         </GapLine>
       ))}
-      {touches.length > 0 && (
-        <p className="text-tight">
-          Touches{' '}
-          {[...new Set(touches.map((gap) => `${sayThing(gap, picture)} with the ${gap.segment}`))].join(', ')}
-        </p>
-      )}
+      {touches.length > 0 && <p className="text-tight">Touches {touches.join('; ')}</p>}
       {rests.length > 0 && <p>Rests: {rests.join(', ')}</p>}
       {one.smallest ? (
         <GapLine gap={one.smallest} placeId={one.placeId}>
@@ -139,7 +133,7 @@ function GapLine({
           light();
         }}
       >
-        <Measure text={children} />
+        {children}
       </button>
     </p>
   );

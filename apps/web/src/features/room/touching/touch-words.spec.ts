@@ -1,7 +1,7 @@
 import { addPiece, emptySetDocument, type SitterGap } from '@settlewright/geometry';
 import { expect, it } from 'vitest';
 import { outlineOf } from './outline.ts';
-import { isMeant, sayGap } from './touch-words.ts';
+import { isMeant, meetings, sayGap } from './touch-words.ts';
 
 const { document, pieceId } = addPiece(emptySetDocument(), 'table');
 const named = { document, bodies: [{ placeId: 'b1:2', name: 'Hetty Vance' }] };
@@ -31,6 +31,7 @@ it('says a gap with what it lies between and on what it was measured', () => {
   expect(sayGap(gap({ distanceMm: 38 }), named, style)).toBe(
     '38\u202fmm between left forearm and T1 top, on the skin',
   );
+  expect(sayGap(gap({ distanceMm: -0.4 }), named, style)).toBe('left forearm and T1 top touch, on the skin');
   const elbows = gap({
     distanceMm: -12,
     measuredOn: 'solids',
@@ -56,4 +57,17 @@ it('draws a tight line around what a joint sweeps', () => {
   // The small one in the middle lies inside.
   expect(points.every(([x]) => x! < 20 || x! > 80)).toBe(true);
   expect(outlineOf([])).toBe('');
+});
+
+it('names each thing once, with the deepest stretch first and the others behind it', () => {
+  const met = meetings([
+    gap({ segment: 'left thigh root', distanceMm: -4 }),
+    gap({ segment: 'belly', distanceMm: -9 }),
+    gap({ segment: 'left thigh', distanceMm: -5 }),
+    gap({ thing: { kind: 'body', placeId: 'b1:2', segment: 'left elbow' }, distanceMm: -6 }),
+  ]);
+  expect(met.map(({ deepest, also }) => [deepest.distanceMm, also])).toEqual([
+    [-9, ['left thigh']],
+    [-6, []],
+  ]);
 });

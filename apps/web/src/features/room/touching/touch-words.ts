@@ -1,4 +1,5 @@
 import {
+  CONTACT_MM,
   formatLength,
   type LengthStyle,
   type Part,
@@ -12,6 +13,9 @@ const ROLE_WORDS: Partial<Record<Part['role'], string>> = {
   'sill-board': 'board',
 };
 
+/** A stretch of a body as people call it. */
+const sayStretch = (segment: string): string => segment.replace(/ (root|inside)$/, '');
+
 interface Named {
   document: SetDocument;
   bodies: readonly { placeId: string; name: string }[];
@@ -21,7 +25,7 @@ interface Named {
 export function sayThing({ thing }: Pick<SitterGap, 'thing'>, { document, bodies }: Named): string {
   if (thing.kind === 'body') {
     const name = bodies.find(({ placeId }) => placeId === thing.placeId)?.name ?? 'a neighbour';
-    return `${name}’s ${thing.segment}`;
+    return `${name}’s ${sayStretch(thing.segment)}`;
   }
   const mark = document.pieces.find(({ id }) => id === thing.pieceId)?.mark ?? '';
   return `${mark} ${ROLE_WORDS[thing.role] ?? thing.role.replaceAll('-', ' ')}`;
@@ -40,7 +44,41 @@ export function isMeant({ segment, thing }: Pick<SitterGap, 'segment' | 'thing'>
 /** "1½″ from left knee to T1 apron, on the skin". */
 export function sayGap(gap: SitterGap, named: Named, style: LengthStyle): string {
   const size = formatLength(Math.abs(gap.distanceMm), style);
-  const to = `${gap.segment} and ${sayThing(gap, named)}`;
+  const to = `${sayStretch(gap.segment)} and ${sayThing(gap, named)}`;
   const how = gap.measuredOn === 'skin' ? 'on the skin' : 'on solids';
+  if (Math.abs(gap.distanceMm) <= CONTACT_MM) return `${to} touch, ${how}`;
   return gap.distanceMm < 0 ? `${to} overlap by ${size}, ${how}` : `${size} between ${to}, ${how}`;
 }
+
+/** One thing that a body meets: the deepest gap, and what else of the body meets it. */
+export interface Meeting {
+  deepest: SitterGap;
+  also: readonly string[];
+}
+
+const keyOf = ({ thing }: SitterGap): string => (thing.kind === 'part' ? thing.partId : thing.placeId);
+
+/** What a body meets, each thing once, in the order given. */
+export function meetings(gaps: readonly SitterGap[]): Meeting[] {
+  const byThing = new Map<string, SitterGap[]>();
+  for (const gap of gaps) byThing.set(keyOf(gap), [...(byThing.get(keyOf(gap)) ?? []), gap]);
+  return [...byThing.values()].flatMap((all) => {
+    const [deepest] = all.toSorted((a, b) => a.distanceMm - b.distanceMm);
+    if (!deepest) return [];
+    const stretches = new Set(all.map(({ segment }) => sayStretch(segment)));
+    stretches.delete(sayStretch(deepest.segment));
+    return [{ deepest, also: [...stretches] }];
+  });
+}
+
+/** "Rests: left forearm on T1 top". */
+export const sayRests = (gaps: readonly SitterGap[], named: Named): string[] => [
+  ...new Set(gaps.map((gap) => `${sayStretch(gap.segment)} on ${sayThing(gap, named)}`)),
+];
+
+/** "Touches T1 apron with the left thigh, right thigh". */
+export const sayTouches = (gaps: readonly SitterGap[], named: Named): string[] =>
+  meetings(gaps).map(
+    ({ deepest, also }) =>
+      `${sayThing(deepest, named)} with the ${[sayStretch(deepest.segment), ...also].join(', ')}`,
+  );
