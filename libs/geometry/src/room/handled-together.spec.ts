@@ -32,7 +32,7 @@ const pieceOf = (document: SetDocument, id: string): Piece => {
 };
 const changed = (document: SetDocument, id: string, patch: object): SetDocument => ({
   ...document,
-  pieces: document.pieces.map((one) => (one.id === id ? ({ ...one, ...patch }) : one)),
+  pieces: document.pieces.map((one) => (one.id === id ? { ...one, ...patch } : one)),
 });
 
 describe('a mirror', () => {
