@@ -1,4 +1,4 @@
-const INCH_MM = 25.4;
+import { MM_PER_INCH } from '../units/length-style.ts';
 
 /** Upper end of each band of vertical and horizontal repeat together, inches, and what it adds. */
 const BANDS = [
@@ -28,10 +28,10 @@ export function repeatChartPercent(
   repeatMm: { acrossMm: number; alongMm: number },
   clothWidthMm: number,
 ): number | undefined {
-  const sum = (repeatMm.acrossMm + repeatMm.alongMm) / INCH_MM;
+  const sum = (repeatMm.acrossMm + repeatMm.alongMm) / MM_PER_INCH;
   const band = BANDS.find(({ upToIn }) => sum <= upToIn + 1e-6);
   if (!band) return undefined;
-  const narrow = clothWidthMm <= NARROW_IN * INCH_MM + 1e-6 && band.addPercent > 0;
+  const narrow = clothWidthMm <= NARROW_IN * MM_PER_INCH + 1e-6 && band.addPercent > 0;
   return band.addPercent + (narrow ? NARROW_ADDS_PERCENT : 0);
 }
 
@@ -52,7 +52,7 @@ export function quickClothMm(
   const length =
     Math.max(widthMm, depthMm) +
     2 * thicknessMm * (1 + (options.folds ?? 0)) +
-    (options.ties ? 2 * INCH_MM : 0);
-  const across = (Math.min(widthMm, depthMm) + thicknessMm) / INCH_MM;
+    (options.ties ? 2 * MM_PER_INCH : 0);
+  const across = (Math.min(widthMm, depthMm) + thicknessMm) / MM_PER_INCH;
   return length * (across > 52 ? 2.6 : across > 25 ? 2 : 1);
 }

@@ -1,3 +1,5 @@
+import { MM_PER_INCH } from '../units/length-style.ts';
+
 /** Width and height, millimetres. */
 interface Size {
   widthMm: number;
@@ -63,7 +65,7 @@ export function diamondCloth(diamond: Size, foamMm: number): Size {
   return { widthMm: diamond.widthMm + 2 * foamMm, heightMm: diamond.heightMm + 2 * foamMm };
 }
 
-const ALL_ROUND_MM = 25.4;
+const ALL_ROUND_MM = MM_PER_INCH;
 
 /**
  * Cloth of a tufted panel by one of the named rules.

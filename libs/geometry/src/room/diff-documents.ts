@@ -62,13 +62,26 @@ export function diffDocuments(
   mine: SetDocument,
   theirs: SetDocument,
 ): DocumentDifference[] {
+  const versions = { base, mine, theirs };
   return [
     ...pieceDifferences(base, mine, theirs),
     ...seatingDifferences(base, mine, theirs),
     ...askedDifferences(base, mine, theirs),
-    ...noteDifferences(base, mine, theirs),
-    ...groupDifferences(base, mine, theirs),
-    ...viewDifferences(base, mine, theirs),
+    ...listedDifferences(
+      versions,
+      ({ knownDifferences }) => knownDifferences,
+      ({ id }) => ({ id: `note:${id}`, kind: 'known-difference', key: id, label: 'Known difference' }),
+    ),
+    ...listedDifferences(
+      versions,
+      ({ groups }) => groups,
+      ({ id, name }) => ({ id: `group:${id}`, kind: 'group', key: id, label: `Group “${name}”` }),
+    ),
+    ...listedDifferences(
+      versions,
+      ({ views }) => views,
+      ({ id, name }) => ({ id: `view:${id}`, kind: 'view', key: id, label: `View “${name}”` }),
+    ),
     ...dimensionDifferences(base, mine, theirs),
   ];
 }
@@ -202,57 +215,20 @@ function askedDifferences(
   );
 }
 
-function noteDifferences(
-  base: SetDocument | null,
-  mine: SetDocument,
-  theirs: SetDocument,
+/** Compares what a document lists under ids, one entry at a time. */
+function listedDifferences<Entry extends { id: string }>(
+  versions: { base: SetDocument | null; mine: SetDocument; theirs: SetDocument },
+  listed: (document: SetDocument) => readonly Entry[] | undefined,
+  named: (entry: Entry) => Named,
 ): DocumentDifference[] {
-  const written = (document: SetDocument | null, id: string) =>
-    document?.knownDifferences.find((note) => note.id === id);
-  const ids = new Set([...theirs.knownDifferences, ...mine.knownDifferences].map(({ id }) => id));
-  return [...ids].flatMap((id) =>
-    compared(
-      { id: `note:${id}`, kind: 'known-difference', key: id, label: 'Known difference' },
-      { base: written(base, id), mine: written(mine, id), theirs: written(theirs, id) },
-      base !== null,
-    ),
-  );
-}
-
-function groupDifferences(
-  base: SetDocument | null,
-  mine: SetDocument,
-  theirs: SetDocument,
-): DocumentDifference[] {
+  const { base, mine, theirs } = versions;
   const find = (document: SetDocument | null, id: string) =>
-    document?.groups?.find((group) => group.id === id);
-  const ids = new Set([theirs, mine].flatMap(({ groups = [] }) => groups.map(({ id }) => id)));
-  return [...ids].flatMap((id) => {
+    (document && listed(document))?.find((entry) => entry.id === id);
+  const entries = [theirs, mine].flatMap((document) => listed(document) ?? []);
+  return [...new Set(entries.map(({ id }) => id))].flatMap((id) => {
     const values = { base: find(base, id), mine: find(mine, id), theirs: find(theirs, id) };
-    const name = (values.mine ?? values.theirs)?.name ?? id;
-    return compared(
-      { id: `group:${id}`, kind: 'group', key: id, label: `Group “${name}”` },
-      values,
-      base !== null,
-    );
-  });
-}
-
-function viewDifferences(
-  base: SetDocument | null,
-  mine: SetDocument,
-  theirs: SetDocument,
-): DocumentDifference[] {
-  const find = (document: SetDocument | null, id: string) => document?.views?.find((view) => view.id === id);
-  const ids = new Set([theirs, mine].flatMap(({ views = [] }) => views.map(({ id }) => id)));
-  return [...ids].flatMap((id) => {
-    const values = { base: find(base, id), mine: find(mine, id), theirs: find(theirs, id) };
-    const name = (values.mine ?? values.theirs)?.name ?? id;
-    return compared(
-      { id: `view:${id}`, kind: 'view', key: id, label: `View “${name}”` },
-      values,
-      base !== null,
-    );
+    const shown = values.mine ?? values.theirs;
+    return shown === undefined ? [] : compared(named(shown), values, base !== null);
   });
 }
 

@@ -7,9 +7,9 @@ import {
 } from '../../outlines/outline.ts';
 import { CUSHION_SETTINGS, KNIFE_EDGE_CROWN, type CushionSettings } from '../cushion-settings.ts';
 import { shapedOutline, type CushionShape } from '../cushion-shape.ts';
-import type { CushionSize } from '../cushion-sizes.ts';
+import { zipPanel, type CushionSize } from '../cushion-sizes.ts';
 import { CONSTRUCTION_WORDS, type CushionMake } from './cushion-make.ts';
-import { rectanglePanel, type CushionPanels, type CutPanel } from './cut-panels.ts';
+import { rectangleOutline, rectanglePanel, type CushionPanels, type CutPanel } from './cut-panels.ts';
 import { edgeStrip } from './edge-strip.ts';
 import { wrappedFront } from './wrapped-front.ts';
 
@@ -147,10 +147,9 @@ function closurePanels(
 ): CutPanel[] {
   const seam = settings.seam.valueMm;
   if (closure !== 'zip') return [rectanglePanel('closing strip', { widthMm: lengthMm, heightMm }, seam)];
-  const cutWidth = (heightMm + 2 * seam + settings.zipAllowance.valueMm) / 2;
   const half = rectanglePanel('zip half', { widthMm: lengthMm, heightMm: heightMm / 2 }, seam, 2);
-  const cut = rectanglePanel('', { widthMm: lengthMm + 2 * seam, heightMm: cutWidth }, 0).cut;
-  return [{ ...half, cut }];
+  const cutHalf = zipPanel(lengthMm, heightMm + 2 * seam, settings);
+  return [{ ...half, cut: rectangleOutline(cutHalf.lengthMm, cutHalf.halfWidthMm) }];
 }
 
 function weltOf(
