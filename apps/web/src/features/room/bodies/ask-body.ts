@@ -23,6 +23,10 @@ function keep(pose: MannequinPose, detail: MannequinDetail, mesh: MannequinMesh)
   return mesh;
 }
 
+/** The skin of a pose at once, made on the page where it was not made before. */
+export const bodyNow = (pose: MannequinPose, detail: MannequinDetail): MannequinMesh =>
+  knownBody(pose, detail) ?? keep(pose, detail, mannequinMesh(pose, detail));
+
 let last: Promise<unknown> = Promise.resolve();
 
 /**
@@ -38,7 +42,7 @@ export function askBody(
     if (!isWanted()) return undefined;
     const known = knownBody(pose, detail);
     if (known) return known;
-    if (typeof Worker === 'undefined') return keep(pose, detail, mannequinMesh(pose, detail));
+    if (typeof Worker === 'undefined') return bodyNow(pose, detail);
     const { means, stance, placement } = pose;
     const mesh = await ask<MannequinMesh>((id): BodyQuestion => ({
       id,

@@ -1,7 +1,7 @@
 import type { Piece, RoomFor } from '@settlewright/geometry';
 import { useEffect, useId, useLayoutEffect, useRef } from 'react';
 import { classNames } from '@/components/class-names.ts';
-import { focusWayOut } from '../components/focus-way-out.ts';
+import { NumberInput } from '../components/number-input.tsx';
 import { NumberSlip } from '../components/number-slip.tsx';
 import type { NumberEdit } from '../hooks/use-number-edit.ts';
 import type { NumberParameter } from '../numbers.ts';
@@ -39,26 +39,11 @@ export function HandleField({ piece, number, edit, room, onLeft }: Props) {
     >
       <label className="flex items-baseline gap-2 text-sm">
         <span aria-hidden="true">{number.label}</span>
-        <input
+        <NumberInput
           ref={field}
-          value={edit.text}
-          onChange={(event) => edit.type(event.target.value)}
-          onKeyDown={(event) => {
-            event.stopPropagation();
-            edit.keys(event);
-            if (event.key === 'Tab' && (edit.beyond || !edit.finish())) {
-              event.preventDefault();
-              focusWayOut(slipId);
-            }
-          }}
-          onBlur={(event) => {
-            if (event.relatedTarget?.closest(`#${CSS.escape(slipId)}`)) return;
-            if (!edit.finish()) edit.cancel();
-          }}
-          aria-label={number.label}
-          aria-describedby={slipId}
-          aria-invalid={wrong || undefined}
-          autoComplete="off"
+          edit={edit}
+          label={number.label}
+          slipId={slipId}
           className={classNames(
             'w-24 rounded-sm border-[1.25px] px-2 text-center font-semibold',
             wrong ? 'border-wont bg-wont-wash' : 'border-chalk bg-sheet',

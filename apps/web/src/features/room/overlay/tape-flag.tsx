@@ -2,7 +2,7 @@ import type { LengthStyle, TapeLine } from '@settlewright/geometry';
 import { useId, useLayoutEffect, useRef, useState } from 'react';
 import { classNames } from '@/components/class-names.ts';
 import { Measure } from '@/components/measure.tsx';
-import { focusWayOut } from '../components/focus-way-out.ts';
+import { NumberInput } from '../components/number-input.tsx';
 import { NumberSlip } from '../components/number-slip.tsx';
 import { numbersOf } from '../components/piece-numbers.ts';
 import { useChangeNumber } from '../hooks/use-change-number.ts';
@@ -152,26 +152,11 @@ function EditableFlag({
       )}
     >
       <span aria-hidden="true">{tape.name}&nbsp;</span>
-      <input
+      <NumberInput
         ref={field}
-        value={edit.text}
-        onChange={(event) => edit.type(event.target.value)}
-        onKeyDown={(event) => {
-          event.stopPropagation();
-          edit.keys(event);
-          if (event.key === 'Tab' && (edit.beyond || !edit.finish())) {
-            event.preventDefault();
-            focusWayOut(slipId);
-          }
-        }}
-        onBlur={(event) => {
-          if (event.relatedTarget?.closest(`#${CSS.escape(slipId)}`)) return;
-          if (!edit.finish()) edit.cancel();
-        }}
-        aria-label={parameter.label}
-        aria-describedby={slipId}
-        aria-invalid={wrong || undefined}
-        autoComplete="off"
+        edit={edit}
+        label={parameter.label}
+        slipId={slipId}
         style={{ width: `${Math.max(4, edit.text.length + 1)}ch` }}
         className="bg-transparent text-center font-semibold outline-2 outline-transparent focus-visible:shadow-none"
       />

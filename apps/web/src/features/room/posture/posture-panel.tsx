@@ -1,7 +1,6 @@
 import { lazy, Suspense } from 'react';
-import { Button } from '@/components/button.tsx';
 import { LoadingLine } from '@/components/loading.tsx';
-import { RuleHeading } from '@/components/rule-heading.tsx';
+import { DisclosedSection } from '../components/disclosed-section.tsx';
 import { useSurroundings } from '../room-context.tsx';
 import { openSitting, useChosenPlace } from './chosen-place.ts';
 
@@ -13,22 +12,16 @@ export function PosturePanel() {
   const open = useChosenPlace((state) => state.open);
   if (detail !== 'full') return null;
   return (
-    <section aria-labelledby="sitting-heading">
-      <RuleHeading
-        id="sitting-heading"
-        aside={
-          <Button look="word" aria-expanded={open} onClick={() => openSitting(!open)}>
-            {open ? 'Close sitting' : 'Show sitting'}
-          </Button>
-        }
-      >
-        How they sit
-      </RuleHeading>
-      {open && (
-        <Suspense fallback={<LoadingLine words="Looking at who sits here" />}>
-          <Sitting />
-        </Suspense>
-      )}
-    </section>
+    <DisclosedSection
+      id="sitting-heading"
+      title="How they sit"
+      open={open}
+      onToggle={() => openSitting(!open)}
+      words={{ closed: 'Show sitting', open: 'Close sitting' }}
+    >
+      <Suspense fallback={<LoadingLine words="Looking at who sits here" />}>
+        <Sitting />
+      </Suspense>
+    </DisclosedSection>
   );
 }

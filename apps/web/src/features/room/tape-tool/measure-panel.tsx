@@ -1,6 +1,5 @@
 import { lazy, Suspense, useState } from 'react';
-import { Button } from '@/components/button.tsx';
-import { RuleHeading } from '@/components/rule-heading.tsx';
+import { DisclosedSection } from '../components/disclosed-section.tsx';
 import { useSurroundings } from '../room-context.tsx';
 import { useRoom } from '../store.ts';
 import { useLaidTapes } from './tape-store.ts';
@@ -13,22 +12,16 @@ export function MeasurePanel() {
   const [open, setOpen] = useState(false);
   const count = useLaidTapes(path.setId).length + useRoom((state) => state.document.dimensions?.length ?? 0);
   return (
-    <section aria-labelledby="measure-heading">
-      <RuleHeading
-        id="measure-heading"
-        aside={
-          <Button look="word" aria-expanded={open} onClick={() => setOpen(!open)}>
-            {open ? 'Close measuring' : count > 0 ? `Show ${count} measured` : 'Measure by name'}
-          </Button>
-        }
-      >
-        Measure
-      </RuleHeading>
-      {open && (
-        <Suspense fallback={null}>
-          <Measures />
-        </Suspense>
-      )}
-    </section>
+    <DisclosedSection
+      id="measure-heading"
+      title="Measure"
+      open={open}
+      onToggle={() => setOpen(!open)}
+      words={{ closed: count > 0 ? `Show ${count} measured` : 'Measure by name', open: 'Close measuring' }}
+    >
+      <Suspense fallback={null}>
+        <Measures />
+      </Suspense>
+    </DisclosedSection>
   );
 }

@@ -1,29 +1,19 @@
 import {
   endsWords,
-  mannequinMesh,
   measureEnds,
   measuringScene,
-  type MannequinMesh,
-  type MannequinPose,
   type MeasuredLine,
   type MeasureEnd,
   type MeasuringScene,
   type TapeLine,
 } from '@settlewright/geometry';
 import { useMemo } from 'react';
+import { bodyNow } from '../bodies/ask-body.ts';
 import type { RoomPicture } from '../picture.ts';
 import { useSurroundings } from '../room-context.tsx';
 import { useLaidTapes } from './tape-store.ts';
 
 const placeOf = (placeId: string): number => Number(placeId.slice(placeId.lastIndexOf(':') + 1));
-
-const skins = new WeakMap<MannequinPose, MannequinMesh>();
-
-function skinOf(pose: MannequinPose): MannequinMesh {
-  const skin = skins.get(pose) ?? mannequinMesh(pose);
-  skins.set(pose, skin);
-  return skin;
-}
 
 /** A measured line as lists and the drawing show it. */
 export interface ShownMeasure {
@@ -49,7 +39,7 @@ export function useMeasuringScene(picture: RoomPicture): MeasuringScene {
         pose,
         // Made when somebody measures: most pages are never measured.
         get mesh() {
-          return skinOf(pose);
+          return bodyNow(pose, 'near');
         },
       })),
     );

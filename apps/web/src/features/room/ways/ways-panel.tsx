@@ -7,8 +7,8 @@ import {
 } from '@settlewright/geometry';
 import { useEffect, useMemo, useState } from 'react';
 import { Button } from '@/components/button.tsx';
-import { RuleHeading } from '@/components/rule-heading.tsx';
 import { Select } from '@/components/select.tsx';
+import { DisclosedSection } from '../components/disclosed-section.tsx';
 import { Toggle } from '../components/toggle.tsx';
 import { useTakeStep } from '../hooks/use-take-step.ts';
 import { useSurroundings } from '../room-context.tsx';
@@ -29,19 +29,15 @@ export function WaysPanel() {
   const document = useRoom((state) => state.document);
   const [open, setOpen] = useState(false);
   return (
-    <section aria-labelledby="ways-heading">
-      <RuleHeading
-        id="ways-heading"
-        aside={
-          <Button look="word" aria-expanded={open} onClick={() => setOpen(!open)}>
-            {open ? 'Close ways in' : 'Show ways in'}
-          </Button>
-        }
-      >
-        Ways in
-      </RuleHeading>
-      {open && <Ways document={document} />}
-    </section>
+    <DisclosedSection
+      id="ways-heading"
+      title="Ways in"
+      open={open}
+      onToggle={() => setOpen(!open)}
+      words={{ closed: 'Show ways in', open: 'Close ways in' }}
+    >
+      <Ways document={document} />
+    </DisclosedSection>
   );
 }
 
