@@ -23,7 +23,8 @@ import { shotSize } from '../views/view-shot.tsx';
 import { useShots } from '../views/use-shots.tsx';
 import { aboutView } from '../views/view-title.ts';
 import { pdfOf, sheetsOf } from './pdf-sheets.ts';
-import { freeSpace, unprinted, type PaperKey } from './sheet-frame.ts';
+import { MOST_SHEETS, pixelWords, sheetWords, viewSheetWords } from './save-words.ts';
+import { unprinted, type PaperKey } from './sheet-frame.ts';
 import { pdfOfViews } from './view-sheets.ts';
 import { loadSheetFonts } from './sheet-fonts.ts';
 import { pngOf, takeStill } from './still.ts';
@@ -46,8 +47,6 @@ const TYPES: Record<FileKind, string> = {
   glb: 'model/gltf-binary',
 };
 const FARTHEST_MM = 50_000;
-/** A page that makes more stands still for too long, and nobody joins as many. */
-const MOST_SHEETS = 100;
 const PAPER_CHOICES = [
   { value: 'letter', words: 'Letter' },
   { value: 'a4', words: 'A4' },
@@ -286,19 +285,3 @@ export default function SaveDrawing({ onClose }: { onClose: () => void }) {
     </Dialog>
   );
 }
-
-function sheetWords(sheets: number, paper: PaperKey): string {
-  const { widthMm, heightMm } = freeSpace(paper);
-  const name = paper === 'a4' ? 'A4' : 'Letter';
-  if (sheets === 1) return `One sheet of ${name}.`;
-  if (sheets > MOST_SHEETS) {
-    return `${sheets} sheets of ${name} are too many to print; at most ${MOST_SHEETS}. Choose a smaller scale.`;
-  }
-  return `${sheets} sheets of ${name}, each showing ${Math.round(widthMm)} by ${Math.round(heightMm)} mm of paper. The scale is kept; they overlap for joining.`;
-}
-
-const viewSheetWords = (sheets: number, paper: PaperKey): string =>
-  `${sheets === 1 ? 'One sheet' : `${sheets} sheets`} of ${paper === 'a4' ? 'A4' : 'Letter'}, a view on each; not to scale.`;
-
-const pixelWords = ({ width, height }: { width: number; height: number }): string =>
-  `${width} × ${height} pixels, the exact frame of the view; no tapes, no names.`;
