@@ -111,15 +111,31 @@ if (unknown.length > 0) {
   console.error(`No stage is called ${unknown.join(', ')}. Stages: ${Object.keys(stages).join(', ')}.`);
   process.exit(2);
 }
-for (const [name, stage] of Object.entries(stages)) {
-  if (wanted.length > 0 && !wanted.includes(name)) continue;
+async function run(name) {
   const from = Date.now();
   console.log(`\n== ${name}`);
-  const outcome = await stage().catch((error) => {
+  const outcome = await stages[name]().catch((error) => {
     console.error(error);
     return { name, passed: 0, failed: 1 };
   });
   for (const result of [outcome].flat()) results.push({ ...result, seconds: (Date.now() - from) / 1000 });
+}
+
+/** Stages in turn; the lanes of one step, of one core each, beside each other. */
+const steps = [
+  [['build']],
+  [['lint'], ['types', 'format', 'depend', 'unused']],
+  [['units']],
+  [['api']],
+  [['journeys']],
+];
+const isWanted = (name) => wanted.length === 0 || wanted.includes(name);
+for (const lanes of steps) {
+  await Promise.all(
+    lanes.map(async (lane) => {
+      for (const name of lane.filter(isWanted)) await run(name);
+    }),
+  );
 }
 await stop();
 

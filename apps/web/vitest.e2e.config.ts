@@ -7,6 +7,6 @@ export default defineConfig({
     environment: 'node',
     testTimeout: 120_000,
     hookTimeout: 60_000,
-    fileParallelism: false,
+    maxWorkers: 2,
   },
 });

@@ -59,7 +59,7 @@ export const sidewaysPx = (page: Page): Promise<number> =>
 
 /** No serious or critical finding on the page as it stands. */
 export async function expectAccessible(page: Page): Promise<void> {
-  const { violations } = await new AxeBuilder({ page }).analyze();
+  const { violations } = await new AxeBuilder({ page }).options({ resultTypes: ['violations'] }).analyze();
   const grave = violations
     .filter(({ impact }) => impact === 'serious' || impact === 'critical')
     .map(
