@@ -1,7 +1,6 @@
 import { range90, type Body, type MeasureKey } from '@settlewright/anthropometry';
 import { FIGURE_KEYS, type FigureMeans } from './figure.ts';
-import { mannequinMesh, type MannequinMesh } from './mesh.ts';
-import { poseMannequin } from './pose.ts';
+import { poseMannequin, type MannequinPose } from './pose.ts';
 
 /** How small and how large the uncertain measures of one person may be. */
 export interface BodyRange {
@@ -38,21 +37,20 @@ export function bodyRange(body: Body): BodyRange {
   return { smaller, larger, uncertain };
 }
 
-type Posed = Omit<Parameters<typeof poseMannequin>[0], 'means'>;
+type At = Omit<Parameters<typeof poseMannequin>[0], 'means'>;
 
 /**
- * The smaller and the larger body at a place, for a ghosted outline around the drawn one.
+ * The smaller and the larger body as they would sit at a place, for a ghosted outline around the drawn one.
  *
  * @param range - from `bodyRange`
  * @param at - what `poseMannequin` needs beside the measures
- * @returns far meshes in the room frame, millimetres, cheap to draw and not to be measured on; `undefined` when
- * every measure is known
+ * @returns poses whose skins are for looking at, not to be measured on; `undefined` when every measure is known
  */
-export function ghostMeshes(
+export function ghostPoses(
   range: BodyRange,
-  at: Posed,
-): { smaller: MannequinMesh; larger: MannequinMesh } | undefined {
+  at: At,
+): { smaller: MannequinPose; larger: MannequinPose } | undefined {
   if (range.uncertain.length === 0) return undefined;
-  const mesh = (means: FigureMeans): MannequinMesh => mannequinMesh(poseMannequin({ ...at, means }), 'far');
-  return { smaller: mesh(range.smaller), larger: mesh(range.larger) };
+  const pose = (means: FigureMeans): MannequinPose => poseMannequin({ ...at, means });
+  return { smaller: pose(range.smaller), larger: pose(range.larger) };
 }

@@ -4,7 +4,7 @@ import survey from '@settlewright/seed-data/populations/ansur2.json' with { type
 import childrenFile from '@settlewright/seed-data/populations/children.json' with { type: 'json' };
 import { furthest } from '../../test/mesh-rays.ts';
 import { selfCrossings, visibleCrossings } from '../../test/self-crossings.ts';
-import { bodyRange, ghostMeshes } from './body-range.ts';
+import { bodyRange, ghostPoses } from './body-range.ts';
 import { childFigure } from './child-figure.ts';
 import { mannequinMesh } from './mesh.ts';
 import { poseMannequin, type MannequinPose } from './pose.ts';
@@ -117,16 +117,27 @@ describe('ghosts of what is not known', () => {
     }
   });
 
-  it('are two far meshes around the body, and none where everything is known', () => {
+  it('are two bodies around the drawn one, and none where everything is known', () => {
     const at = { ...place(430), shoeMm: 25 };
-    const ghosts = ghostMeshes(bodyRange(told), at)!;
-    const hips = [ghosts.smaller, ghosts.larger].map((mesh) =>
-      furthest(mesh, 0, 1, { axis: 1, from: 440, to: 560 }),
+    const ghosts = ghostPoses(bodyRange(told), at)!;
+    const drawn = poseMannequin({ ...at, means: told.means() });
+    const hips = [ghosts.smaller, drawn, ghosts.larger].map((pose) =>
+      furthest(mannequinMesh(pose, 'far'), 0, 1, { axis: 1, from: 440, to: 560 }),
     );
-    expect(hips[1]! - hips[0]!).toBeGreaterThan(15);
-    expect(ghosts.larger.indices.length / 3).toBeLessThan(5000);
+    expect(hips[1]! - hips[0]!).toBeGreaterThan(5);
+    expect(hips[2]! - hips[1]!).toBeGreaterThan(5);
     const exact = model.predict(model.mannequin({ bodyData: 'women', measure: 'stature', percentile: 5 }));
-    expect(ghostMeshes(bodyRange(exact), at)).toBeUndefined();
+    expect(ghostPoses(bodyRange(exact), at)).toBeUndefined();
+  });
+
+  it('can be posed and drawn whole for anybody of whom nothing was told', () => {
+    for (const bodyData of ['women', 'men', 'mixed'] as const) {
+      const nobody = model.predict({ bodyData, measured: {}, shoeMm: 25, clothing: 'light' });
+      const ghosts = ghostPoses(bodyRange(nobody), { ...place(430), shoeMm: 25 })!;
+      for (const pose of [ghosts.smaller, ghosts.larger]) {
+        expect(mannequinMesh(pose, 'far').positions.every(Number.isFinite)).toBe(true);
+      }
+    }
   });
 });
 

@@ -2,6 +2,7 @@ import {
   checkSet,
   REFERENCE_SITTER_KG,
   seatSinkMm,
+  type Body,
   type FitSheet,
   type MeasureKey,
   type PlaceSituation,
@@ -24,6 +25,8 @@ import type { CastMember } from '@/lib/contract';
 import type { FitEngine } from './engine';
 import { coloursOf, sitterName, sittersOf } from './sitters';
 
+type PosedAt = Omit<Parameters<typeof poseMannequin>[0], 'means'>;
+
 /** A body at its place; its skin is made from the pose, in a worker. */
 export interface SeatedBody {
   placeId: string;
@@ -34,6 +37,10 @@ export interface SeatedBody {
   /** True when the height itself, or more, was predicted or told. */
   estimated: boolean;
   pose: MannequinPose;
+  /** What the pose was made from beside the measures. */
+  at: PosedAt;
+  /** What is believed of the measures; absent for readers who may not see them. */
+  belief?: Body;
   /** Top of the head, where the leader of a name ends. */
   crownMm: Vec3;
 }
@@ -67,6 +74,7 @@ interface BodyInput {
   shoeMm: number;
   weightKg: number;
   estimated: boolean;
+  belief?: Body;
 }
 
 function crownOf(pose: MannequinPose, frame: PlaceFrame): Vec3 {
@@ -77,7 +85,7 @@ function crownOf(pose: MannequinPose, frame: PlaceFrame): Vec3 {
 
 /** Remembers the last body drawn at a place, so that a change elsewhere costs nothing. */
 function createBodyMaker() {
-  const kept = new Map<string, { key: string; pose: MannequinPose }>();
+  const kept = new Map<string, { key: string; pose: MannequinPose; at: PosedAt }>();
   return (
     frame: PlaceFrame,
     situation: PlaceSituation,
@@ -90,11 +98,12 @@ function createBodyMaker() {
     const sinkMm = situation.foam ? seatSinkMm(situation.foam, body.weightKg).sinkMm : 0;
     const { means, shoeMm } = body;
     const around = { ...situation, footRail: footRailOf(parts, frame) };
-    const input = { means, shoeMm, frame, situation: around, sinkMm, choice };
+    const at: PosedAt = { shoeMm, frame, situation: around, sinkMm, choice };
+    const input = { means, ...at };
     const key = JSON.stringify(input);
     const last = kept.get(frame.placeId);
     if (last?.key === key) return last;
-    const made = { key, pose: poseMannequin(input) };
+    const made = { key, pose: poseMannequin(input), at };
     kept.set(frame.placeId, made);
     return made;
   };
@@ -158,7 +167,7 @@ export function createPictureMaker(
         const body = engine.model.predict(person);
         const { weightKg } = body;
         const estimated = !person.exact && Object.keys(person.measured).length === 0;
-        return [[placeId, { means: body.means(), shoeMm: person.shoeMm, weightKg, estimated }]];
+        return [[placeId, { means: body.means(), shoeMm: person.shoeMm, weightKg, estimated, belief: body }]];
       }),
     );
   }
@@ -181,7 +190,7 @@ export function createPictureMaker(
       if (!frame || !body || !measured) return [];
       const made = makeBody(frame, measured, body, parts, posture);
       if (!made) return [];
-      const { pose } = made;
+      const { pose, at } = made;
       return [
         {
           placeId,
@@ -191,6 +200,8 @@ export function createPictureMaker(
           statureMm: body.means.stature,
           estimated: body.estimated,
           pose,
+          at,
+          ...(body.belief && { belief: body.belief }),
           crownMm: crownOf(pose, frame),
         },
       ];

@@ -10,6 +10,7 @@ const GROUPS: { title: string; keys: [keys: string, does: string][] }[] = [
       ['Ctrl Shift Z', 'redo it'],
       ['F', 'open or close the fit sheet'],
       ['T', 'take the tape, or put it away'],
+      ['U', 'show how small and how large the sitters may be, or hide it'],
       ['A B C D E', 'go to that view'],
       ['?', 'this list'],
     ],

@@ -2,6 +2,8 @@ import { tapeLines, type Piece } from '@settlewright/geometry';
 import { lazy, Suspense, useId, useMemo, useRef } from 'react';
 import { LoadingLine } from '@/components/loading.tsx';
 import { useTheme } from '@/lib/theme.ts';
+import { useDoubtKey } from '../bodies/doubt-toggle.tsx';
+import { useDoubt } from '../bodies/doubt.ts';
 import type { Clipboard } from '../clipboard/use-clipboard.ts';
 import { joinWords } from '../choosing-words.ts';
 import type { Choosing } from '../hooks/use-choosing.ts';
@@ -43,6 +45,7 @@ const FADE = {
 };
 
 const NOTHING: readonly string[] = [];
+const NOBODY: RoomPicture['bodies'] = [];
 
 const SceneCanvas = lazy(() => import('../scene/scene-canvas.tsx'));
 const HandleLayer = lazy(() => import('../handles/handle-layer.tsx'));
@@ -59,7 +62,7 @@ interface Props {
 
 /** The drawing, what stands over it and what can be done to it. */
 export function SceneStage({ picture, piece, address, actions, several, onOpenCell }: Props) {
-  const { style, canEdit, maker } = useSurroundings();
+  const { style, canEdit, detail, maker } = useSurroundings();
   const theme = useTheme((state) => state.choice);
   const lit = useRoom((state) => state.litCellId);
   const sheet = useRef<HTMLDivElement>(null);
@@ -99,6 +102,9 @@ export function SceneStage({ picture, piece, address, actions, several, onOpenCe
           ({ kind, fromMm }) => kind !== 'gap' || isBehind(fromMm, view.cut),
         )
       : [];
+  const showDoubt = useDoubt((state) => state.shown);
+  const inDoubt = showBodies && detail === 'full' && !clientView ? picture.bodies : NOBODY;
+  useDoubtKey(inDoubt);
   const bodies = showBodies ? picture.bodies.filter((body) => isBodyLeft(body.crownMm, view.cut)) : [];
 
   const measuring = useMeasuringScene(picture);
@@ -166,6 +172,7 @@ export function SceneStage({ picture, piece, address, actions, several, onOpenCe
                 cut={view.cut}
                 chosenIds={chosenIds}
                 showBodies={showBodies}
+                showDoubt={showDoubt && inDoubt.length > 0}
                 theme={theme}
                 report={({ calls, triangles }) => {
                   sheet.current?.setAttribute('data-scene-calls', String(calls));
@@ -218,6 +225,7 @@ export function SceneStage({ picture, piece, address, actions, several, onOpenCe
         letter={letter}
         choosing={several?.choosing}
         bodies={seen.bodies}
+        doubtOf={inDoubt}
         // Whoever sees verdicts alone may have none to show.
         tapes={tapes.length > 0 && !clientView ? seen.tapes : undefined}
       />

@@ -1,6 +1,8 @@
+import { DoubtToggle } from '../bodies/doubt-toggle.tsx';
 import type { RoomAddress } from '../hooks/use-address.ts';
 import type { Choosing } from '../hooks/use-choosing.ts';
 import type { View } from '../hooks/use-view.ts';
+import type { SeatedBody } from '../picture.ts';
 import { SectionToggle } from '../section/section-bar.tsx';
 import type { SceneView } from '../scene/views.ts';
 import { TapeToggle } from '../tape-tool/tape-bar.tsx';
@@ -13,12 +15,14 @@ interface Props {
   /** Left out where only one piece can be looked at. */
   choosing: Choosing | undefined;
   bodies: { shown: boolean; show: (shown: boolean) => void };
+  /** Whose measures may be in doubt; none where nobody is drawn or the reader may not know. */
+  doubtOf: readonly SeatedBody[];
   /** Left out where there are none to show. */
   tapes: { shown: boolean; show: (shown: boolean) => void } | undefined;
 }
 
 /** The row under the drawing: what is shown on it, and how large. */
-export function StageTools({ address, view, letter, choosing, bodies, tapes }: Props) {
+export function StageTools({ address, view, letter, choosing, bodies, doubtOf, tapes }: Props) {
   return (
     <div className="flex flex-wrap items-center justify-end gap-x-5 gap-y-1 py-1.5 text-sm text-ink-2">
       {choosing && (
@@ -29,6 +33,7 @@ export function StageTools({ address, view, letter, choosing, bodies, tapes }: P
       <Toggle on={bodies.shown} onChange={bodies.show}>
         Bodies
       </Toggle>
+      {doubtOf.length > 0 && <DoubtToggle bodies={doubtOf}>Doubt</DoubtToggle>}
       {tapes && (
         <Toggle on={tapes.shown} onChange={tapes.show}>
           Tapes

@@ -42,11 +42,11 @@ export function PostureForm({ picture, body }: Props) {
   const seat = picture.document.seating.find(({ pieceId, place }) => `${pieceId}:${place}` === body.placeId);
   const choice = seat?.posture ?? {};
   const { refused, feetHang } = useMemo(() => {
-    const why = (part: PostureChoice) => refusalOf(picture, body, part);
+    const why = (part: PostureChoice) => refusalOf(body, part);
     const refused = new Map<string, PoseNote | undefined>([['rail', why({ feet: 'rail' })]]);
     for (const arms of ['table', 'cup', 'sill-left', 'sill-right'] as const) refused.set(arms, why({ arms }));
     return { refused, feetHang: body.pose.heelGapMm > 0.5 };
-  }, [picture, body]);
+  }, [body]);
   if (!seat || !canEdit) return null;
   const name = shortName(body.name);
 

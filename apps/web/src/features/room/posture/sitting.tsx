@@ -2,6 +2,7 @@ import { Select } from '@/components/select.tsx';
 import { usePicture } from '../room-context.tsx';
 import { RoomRound } from '../touching/room-round.tsx';
 import { choosePlace, useChosenPlace } from './chosen-place.ts';
+import { DoubtWords } from './doubt-words.tsx';
 import { PostureForm } from './posture-form.tsx';
 import { SittingWords } from './sitting-words.tsx';
 
@@ -25,6 +26,7 @@ export default function Sitting() {
         onChange={choosePlace}
       />
       <SittingWords body={body} />
+      <DoubtWords picture={picture} body={body} />
       <PostureForm key={body.placeId} picture={picture} body={body} />
       <RoomRound picture={picture} placeId={body.placeId} />
     </div>

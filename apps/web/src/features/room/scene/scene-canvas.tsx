@@ -1,5 +1,5 @@
 import { Canvas, useFrame, useThree } from '@react-three/fiber';
-import { useEffect, useLayoutEffect, useMemo, useRef } from 'react';
+import { lazy, Suspense, useEffect, useLayoutEffect, useMemo, useRef } from 'react';
 import { OrthographicCamera } from 'three';
 import { offerStill, type Taker } from '../export/still';
 import type { RoomPicture } from '../picture';
@@ -15,6 +15,8 @@ import { add, scale, turn } from './vectors';
 import { projectionColumns, type ViewFrame } from './view-frame';
 import type { Cut, SceneView } from './views';
 
+const GhostFigures = lazy(() => import('../bodies/ghost-figures'));
+
 const METRES = 0.001;
 
 export interface SceneProps {
@@ -24,6 +26,8 @@ export interface SceneProps {
   cut: Cut | undefined;
   chosenIds: readonly string[];
   showBodies: boolean;
+  /** Draws round the bodies how small and how large they may be. */
+  showDoubt?: boolean;
   /** Raised when the theme changes. */
   theme: string;
   /** Receives the figures of the last picture, for tests and for the curious. */
@@ -72,6 +76,7 @@ function Stage({
   cut,
   chosenIds,
   showBodies,
+  showDoubt = false,
   theme,
   report,
   offer = offerStill,
@@ -116,7 +121,7 @@ function Stage({
       }),
     [advance, canvas, offer],
   );
-  useEffect(() => invalidate(), [picture, letter, chosenIds, showBodies, invalidate]);
+  useEffect(() => invalidate(), [picture, letter, chosenIds, showBodies, showDoubt, invalidate]);
   useEffect(
     () => () => Object.values(materials).forEach((item) => 'dispose' in item && item.dispose()),
     [materials],
@@ -151,6 +156,11 @@ function Stage({
       {cut && <CutCaps picture={picture} letter={letter} cut={cut} materials={materials} />}
       {showBodies && (
         <BodyFigures picture={picture} palette={palette} shared={shared} materials={materials} />
+      )}
+      {showBodies && showDoubt && (
+        <Suspense fallback={null}>
+          <GhostFigures bodies={picture.bodies} palette={palette} shared={shared} />
+        </Suspense>
       )}
     </group>
   );

@@ -26,7 +26,8 @@ export function createSharedUniforms() {
 
 export type SharedUniforms = ReturnType<typeof createSharedUniforms>;
 
-const CUT = /* glsl */ `
+/** Leaves out what a section has cut away. */
+export const CUT = /* glsl */ `
   uniform vec4 uCut;
   varying vec3 vRoom;
   void cut() { if (dot(uCut.xyz, vRoom) > uCut.w) discard; }`;
