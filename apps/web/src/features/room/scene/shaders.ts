@@ -32,14 +32,19 @@ export const CUT = /* glsl */ `
   varying vec3 vRoom;
   void cut() { if (dot(uCut.xyz, vRoom) > uCut.w) discard; }`;
 
+/** Where a vertex stands in the room, mm: what is carried keeps its own vertices and is set down elsewhere. */
+const ROOM = /* glsl */ `
+  varying vec3 vRoom;
+  vec3 roomOf(vec3 at) { return (modelMatrix * vec4(at, 1.0)).xyz * 1000.0; }`;
+
 const SURFACE_VERTEX = /* glsl */ `
   attribute float tone;
-  varying vec3 vRoom;
+  ${ROOM}
   varying vec3 vNormalRoom;
   varying float vTone;
   void main() {
-    vRoom = position;
-    vNormalRoom = normal;
+    vRoom = roomOf(position);
+    vNormalRoom = mat3(modelMatrix) * normal;
     vTone = tone;
     gl_Position = projectionMatrix * modelViewMatrix * vec4(position, 1.0);
   }`;
@@ -64,11 +69,11 @@ const SURFACE_FRAGMENT = /* glsl */ `
   }`;
 
 const SHADOW_VERTEX = /* glsl */ `
-  varying vec3 vRoom;
+  ${ROOM}
   void main() {
-    vRoom = position;
-    vec3 fallen = vec3(position.x + position.y * 0.10, 1.0, position.z + position.y * 0.16);
-    gl_Position = projectionMatrix * modelViewMatrix * vec4(fallen, 1.0);
+    vRoom = roomOf(position);
+    vec3 fallen = vec3(vRoom.x + vRoom.y * 0.10, 1.0, vRoom.z + vRoom.y * 0.16);
+    gl_Position = projectionMatrix * viewMatrix * vec4(fallen * 0.001, 1.0);
   }`;
 
 const FLAT_FRAGMENT = /* glsl */ `
@@ -82,7 +87,7 @@ const LINE_VERTEX = /* glsl */ `
   attribute float lineWeight;
   uniform vec2 uSize;
   uniform float uWidth;
-  varying vec3 vRoom;
+  ${ROOM}
   varying float vWeight;
   void main() {
     vec4 a = projectionMatrix * modelViewMatrix * vec4(lineStart, 1.0);
@@ -96,7 +101,7 @@ const LINE_VERTEX = /* glsl */ `
     vec2 offset = across * position.x + along * (position.y * 2.0 - 1.0) * 0.8;
     at.xy += offset * width / uSize * at.w;
     at.z -= 0.00035 * at.w;
-    vRoom = mix(lineStart, lineEnd, position.y);
+    vRoom = roomOf(mix(lineStart, lineEnd, position.y));
     vWeight = lineWeight;
     gl_Position = at;
   }`;
@@ -136,9 +141,9 @@ const BODY_FRAGMENT = /* glsl */ `
 const HULL_VERTEX = /* glsl */ `
   uniform vec2 uSize;
   uniform float uWidth;
-  varying vec3 vRoom;
+  ${ROOM}
   void main() {
-    vRoom = position;
+    vRoom = roomOf(position);
     vec4 at = projectionMatrix * modelViewMatrix * vec4(position, 1.0);
     vec4 out4 = projectionMatrix * modelViewMatrix * vec4(position + normal, 1.0);
     vec2 push = (out4.xy / out4.w - at.xy / at.w) * uSize;
