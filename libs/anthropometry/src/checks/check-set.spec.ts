@@ -13,8 +13,9 @@ import {
   sitter,
   verdictOf,
 } from '../../test/example-set.ts';
-import { fitRules, model, ruleBook } from '../../test/seed.ts';
+import { ansur2, children, fitRules, model, ruleBook } from '../../test/seed.ts';
 import { TAPE_MEASURE_KEYS } from '../measures/measures.ts';
+import { createBodyModel } from '../people/body-model.ts';
 import type { KnownPerson } from '../people/person.ts';
 import { checkSet } from './check-set.ts';
 import { loadRuleBook, ruleNumber, whyFor } from './rule-book.ts';
@@ -47,6 +48,59 @@ const anyone = fc.record({
   }),
   weightKg: fc.option(fc.double({ min: 45, max: 140, noNaN: true }), { nil: undefined }),
 }) as fc.Arbitrary<Partial<KnownPerson>>;
+
+const withChildren = createBodyModel(ansur2, children);
+
+describe('a child at a place', () => {
+  const child = withChildren.child(3);
+  const checked = (over: Parameters<typeof place>[0] = {}, sitters = [sitter(child)]) =>
+    checkSet({
+      situation: set({ places: [furnished(over)] }),
+      sitters,
+      ruleBook,
+      model: withChildren,
+      settings: { backPosture: 'dining', trafficBehind: 'none' },
+    });
+
+  it('is judged by height, weight and lower leg alone; all else is not known, never a pass', () => {
+    const { rows, counts } = checked();
+    const cells = rows[0]!.cells;
+    const judged = cells.filter(({ outcome }) => outcome.kind === 'verdict');
+    expect(judged.map(({ ruleId }) => ruleId)).toEqual(['SEAT-02']);
+    const others = cells.filter(({ outcome }) => outcome.kind !== 'verdict').map(({ outcome }) => outcome);
+    expect(others.every(({ kind }) => kind === 'notAsked' || kind === 'doesNotApply')).toBe(true);
+    const unknown = others.filter(
+      (outcome) => 'reason' in outcome && outcome.reason === 'not known of a child',
+    );
+    expect(unknown.length).toBeGreaterThan(10);
+    expect(counts.notKnown).toBe(unknown.length);
+    expect(rows[0]!.worst).toBe('wontFit');
+  });
+
+  it('on a seat of the size mark sits well, and yet the row is no pass', () => {
+    const seat = withChildren.predict(child).mean('popliteal_height') + child.shoeMm - 25;
+    const { rows } = checked({ seatTopFrontMm: seat, seatTopHipMm: seat, foam: undefined });
+    const verdict = rows[0]!.cells.find(({ ruleId }) => ruleId === 'SEAT-02')?.outcome;
+    expect(verdict).toMatchObject({ kind: 'verdict', verdict: 'fits' });
+    expect(rows[0]!.worst).toBe('notKnown');
+  });
+
+  it('has its own three measures and shares of a grown-up, and there is none of a mark that is not printed', () => {
+    const body = withChildren.predict(child);
+    expect(body.mean('stature')).toBe((1190 + 1420) / 2);
+    expect(body.mean('popliteal_height')).toBe((315 + 355) / 2 - 25);
+    // NHANES 2015-2016: boys and girls of nine are 1.36 m and 34 kg, of eight 1.30 m and 30 kg.
+    expect(body.weightKg).toBeGreaterThan(26);
+    expect(body.weightKg).toBeLessThan(32);
+    const adult = withChildren.predict({ bodyData: 'mixed', measured: {}, shoeMm: 0, clothing: 'light' });
+    expect(body.mean('sitting_height') / body.mean('stature')).toBeCloseTo(
+      adult.mean('sitting_height') / adult.mean('stature'),
+      6,
+    );
+    expect(() => withChildren.child(9)).toThrow('sizeMark is 9; accepted: 1, 2, 3, 4, 5, 6');
+    expect(() => model.child(3)).toThrow('accepted: none');
+  });
+});
 
 describe('the sheet', () => {
   it('knows no check of a place that nobody is behind, whatever would hold of anybody', () => {

@@ -2,14 +2,14 @@ import type { Body } from '../people/body.ts';
 import { answered, cellPieces, WORST_FIRST, type Answered } from './answered.ts';
 import { confidenceOf, judgementOf, type CheckInput } from './check-input.ts';
 import type { FitCell, FitSheet, Outcome, Sitter, SitterRow, Verdict } from './fit-sheet.ts';
-import { sinkUnder } from './person-check.ts';
+import { sinkUnder, type Said } from './person-check.ts';
 import { PERSON_CHECKS } from './person-checks.ts';
 import type { PieceAnswer, PieceAsked, Seated } from './piece-check.ts';
 import { PIECE_CHECKS } from './piece-checks.ts';
 import { publicRowOf } from './public-row.ts';
 import type { Rule } from './rule-book.ts';
 import type { PlaceSituation } from './situation.ts';
-import { bodiesIn, judge, type Judgement } from './verdict.ts';
+import { bodiesIn, hasBorrowed, judge, readsBorrowed, type Judgement } from './verdict.ts';
 
 /**
  * The fit sheet of a set: every sitter against every rule, the public, and the pieces and ways.
@@ -32,7 +32,10 @@ export function checkSet(input: CheckInput): FitSheet {
   const rows = sitters.map((sitter) => rowOf(input, sitter, places.get(sitter.placeId)));
   const counts: Record<Verdict, number> = { fits: 0, tight: 0, wontFit: 0, notKnown: 0 };
   for (const { cells } of rows) {
-    for (const { outcome } of cells) if (outcome.kind === 'verdict') counts[outcome.verdict] += 1;
+    for (const { outcome } of cells) {
+      if (outcome.kind === 'verdict') counts[outcome.verdict] += 1;
+      else if (outcome === NOT_OF_CHILDREN) counts.notKnown += 1;
+    }
   }
   return {
     rows,
@@ -80,12 +83,12 @@ function rowOf(
   const sink = sinkUnder(place?.foam, body);
   const cells = checks.map((check): FitCell => {
     const rule = ruleBook.rule(check.id);
-    const placed: Answered = place
-      ? answered(
-          check.ask({ rule, place, name: sitter.name, body, sink, model, lensHeightMm }),
-          judgementOf(input, rule),
-        )
-      : { outcome: { kind: 'doesNotApply', reason: 'no such place' }, pieces: [] };
+    const said = place && check.ask({ rule, place, name: sitter.name, body, sink, model, lensHeightMm });
+    const placed: Answered = !said
+      ? { outcome: { kind: 'doesNotApply', reason: 'no such place' }, pieces: [] }
+      : isBeyondChild(said, body)
+        ? { outcome: NOT_OF_CHILDREN, pieces: [] }
+        : answered(said, judgementOf(input, rule));
     return {
       id: `${rule.id}|${sitter.placeId}`,
       ruleId: rule.id,
@@ -98,7 +101,9 @@ function rowOf(
     };
   });
   const found = new Set(
-    cells.flatMap(({ outcome }) => (outcome.kind === 'verdict' ? [outcome.verdict] : [])),
+    cells.flatMap(({ outcome }): Verdict[] =>
+      outcome.kind === 'verdict' ? [outcome.verdict] : outcome === NOT_OF_CHILDREN ? ['notKnown'] : [],
+    ),
   );
   return {
     sitterId: sitter.id,
@@ -113,6 +118,19 @@ function rowOf(
   };
 }
 
+/** Instead of a verdict on measures that are not known of children: never a pass. */
+const NOT_OF_CHILDREN: Outcome = { kind: 'notAsked', reason: 'not known of a child' };
+
+/** Whether a rule asks or tells more of a child than is known, or asks what is set for grown-ups alone. */
+function isBeyondChild(said: Said, { person }: Body): boolean {
+  if (!person.child) return false;
+  if ('information' in said) return hasBorrowed(said.information.value);
+  return (
+    Array.isArray(said) &&
+    said.some(({ question }) => readsBorrowed(question) || bodiesIn(question).length === 0)
+  );
+}
+
 /** A verdict about nobody: there is no body to measure either. */
 const untold = (outcome: Outcome): Outcome =>
   outcome.kind === 'verdict' ? { ...outcome, verdict: 'notKnown', estimated: true, settleWith: [] } : outcome;
@@ -125,7 +143,7 @@ function pieceCell(
 ): FitCell {
   const { pieceIds, marks, part, said } = answer;
   const where = [pieceIds.join('+'), ...(part ? [part] : [])].filter(Boolean).join('|');
-  const judged = 'kind' in said ? said : judge(said, judgement);
+  const judged = 'kind' in said ? said : readsBorrowed(said) ? NOT_OF_CHILDREN : judge(said, judgement);
   const ofNobody = !('kind' in said) && bodiesIn(said).some((body) => bodiesOfNobody.has(body));
   return {
     id: `${rule.id}|${where || 'set'}`,

@@ -1,5 +1,6 @@
 import type { MeasureKey } from '../measures/measures.ts';
 import type { Body } from '../people/body.ts';
+import { saysSomething } from '../people/child-body.ts';
 import { best, collectPredicted, minus, type Amount, type PredictedMeasure } from './amount.ts';
 import type { LedgerLine, LimitLines, Verdict, VerdictOutcome } from './fit-sheet.ts';
 import { probabilityOfRoom, roomMoved, roomQuantile, roomWithin, type Band } from './room.ts';
@@ -170,6 +171,13 @@ const amountsIn = ({ value, pass, fail }: Question): Amount[] =>
 /** Bodies that a question reads. */
 export const bodiesIn = (question: Question): Body[] =>
   amountsIn(question).flatMap(({ terms }) => terms.map(({ body }) => body));
+
+/** Whether an amount has a measure in it that says nothing of its body, as most of a child's do. */
+export const hasBorrowed = ({ terms }: Amount): boolean =>
+  terms.some(({ body, parts }) => parts.some(([key, factor]) => factor !== 0 && !saysSomething(body, key)));
+
+/** The same of a question. */
+export const readsBorrowed = (question: Question): boolean => amountsIn(question).some(hasBorrowed);
 
 function predictedIn(question: Question): PredictedMeasure[] {
   const found: PredictedMeasure[] = [];

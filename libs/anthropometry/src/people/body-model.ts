@@ -1,7 +1,10 @@
 import { MEASURE_KEYS, type MeasureKey } from '../measures/measures.ts';
 import { surveyPercentile } from '../populations/percentiles.ts';
+import { readChildren } from '../populations/children-file.ts';
+import { middleChild } from '../populations/middle-child.ts';
 import { readSurvey, type Survey, type SurveyGroup } from '../populations/survey.ts';
 import { bodyFrom, type Body } from './body.ts';
+import { childBody } from './child-body.ts';
 import { momentsOfBody, type WeightedPosterior } from './body-moments.ts';
 import { createGroupModel, type GroupModel, type Observation, type Posterior } from './group-model.ts';
 import type { BodyData, KnownPerson, PercentileMannequin } from './person.ts';
@@ -24,6 +27,14 @@ export interface BodyModel {
    */
   mannequin(mannequin: PercentileMannequin): KnownPerson;
   /**
+   * The middle child of a size mark, to be drawn for scale: only height, weight and lower leg are children's.
+   *
+   * @param sizeMark - number of the mark
+   * @returns an exact person
+   * @throws RangeError when the model knows no such mark
+   */
+  child(sizeMark: number): KnownPerson;
+  /**
    * A percentile of one measure in the surveyed group.
    *
    * @param bodyData - women, men, or `mixed` for as many of each
@@ -38,16 +49,19 @@ export interface BodyModel {
  * Builds the body model of one surveyed population.
  *
  * @param summary - parsed JSON of the survey statistics, for example `seed-data/populations/ansur2.json`
+ * @param childrenFile - parsed `seed-data/populations/children.json`, where children are to sit as well
  * @returns the model; it keeps its factorisations and predictions, and is otherwise pure
  * @throws Error naming the field when the statistics do not hold together
  * @source each sex a multivariate normal in logs (elbow rest height plain), the spread of what is left over growing
  *   with weight as fitted to the survey
  */
-export function createBodyModel(summary: unknown): BodyModel {
+export function createBodyModel(summary: unknown, childrenFile?: unknown): BodyModel {
   const survey = readSurvey(summary);
   const groups = { women: createGroupModel(survey, 'women'), men: createGroupModel(survey, 'men') };
   const bodies = new WeakMap<KnownPerson, Body>();
   const mannequins = new Map<string, KnownPerson>();
+  const children = childrenFile === undefined ? undefined : readChildren(childrenFile);
+  const childPeople = new Map<number, KnownPerson>();
 
   const partOf = (name: SurveyGroup, person: KnownPerson): WeightedPosterior => {
     const group = groups[name];
@@ -74,11 +88,13 @@ export function createBodyModel(summary: unknown): BodyModel {
     ];
   }
 
-  return {
+  const model: BodyModel = {
     predict(person) {
       const known = bodies.get(person);
       if (known) return known;
-      const body = bodyFrom(person, partsOf(person));
+      const body = person.child
+        ? childBody(person, model.predict(GROWN_UP))
+        : bodyFrom(person, partsOf(person));
       bodies.set(person, body);
       return body;
     },
@@ -98,9 +114,25 @@ export function createBodyModel(summary: unknown): BodyModel {
       mannequins.set(name, person);
       return person;
     },
+    child(sizeMark) {
+      const known = childPeople.get(sizeMark);
+      if (known) return known;
+      const mark = children?.marks.find((each) => each.mark === sizeMark);
+      if (!children || !mark) {
+        const marks = children?.marks.map((each) => each.mark).join(', ') ?? 'none';
+        throw new RangeError(`sizeMark is ${sizeMark}; accepted: ${marks}`);
+      }
+      const person = middleChild(children, mark);
+      childPeople.set(sizeMark, person);
+      return person;
+    },
     percentile: (bodyData, key, p) => surveyPercentile(survey, bodyData, key, p),
   };
+  return model;
 }
+
+/** Whose shares of stature a child is drawn with. */
+const GROWN_UP: KnownPerson = { bodyData: 'mixed', measured: {}, shoeMm: 0, clothing: 'light' };
 
 const NO_SHIFT: ReadonlyMap<number, number> = new Map();
 

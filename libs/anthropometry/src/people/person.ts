@@ -27,6 +27,8 @@ export interface KnownPerson {
    * Absent for a living person.
    */
   exact?: true;
+  /** A child by size mark: besides height, weight and lower leg everything is borrowed of grown-ups, to draw with. */
+  child?: true;
 }
 
 /** A percentile mannequin as the set document names it: "woman, 5th in stature". */

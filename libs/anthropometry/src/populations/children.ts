@@ -107,7 +107,7 @@ function shapesOf(years: readonly ChildYear[], low: number, high: number) {
 }
 
 /** Weight of the ages at which children have a stature, each age counting by how often it has it. */
-function weightAt(years: readonly ChildYear[], mm: number): { ln: number; sd: number } {
+export function weightAt(years: readonly ChildYear[], mm: number): { ln: number; sd: number } {
   let [total, ln, variance] = [0, 0, 0];
   for (const { statureMm, weightKg } of years) {
     const often = normalDensity((mm - statureMm.mean) / statureMm.sd) / statureMm.sd;

@@ -30,7 +30,7 @@ export function createSymbols(wear: Wear): Symbols {
 const refuse = (): never => {
   throw new Error('A rule reads values of a body; accepted: amounts, so that it can be asked of many');
 };
-const NO_MODEL: BodyModel = { predict: refuse, mannequin: refuse, percentile: refuse };
+const NO_MODEL: BodyModel = { predict: refuse, mannequin: refuse, child: refuse, percentile: refuse };
 
 /**
  * Asks a rule of a body without values.
