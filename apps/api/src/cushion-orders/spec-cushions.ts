@@ -1,4 +1,14 @@
-import { type CushionDatum, type CushionSpec, type EdgeMeets, groupCushions } from '@settlewright/geometry';
+import {
+  CLOSURE_WORDS,
+  type CushionDatum,
+  type CushionSpec,
+  type EdgeMeets,
+  foamOfCushion,
+  groupCushions,
+  makeWords,
+  outlineExtent,
+  outlinePerimeter,
+} from '@settlewright/geometry';
 import type { DatumLine, SpecCushion } from '../paper/spec-pack';
 
 const MEETS: Record<EdgeMeets, string> = {
@@ -30,29 +40,35 @@ function specCushion(
   spec: CushionSpec,
   alike: Pick<SpecCushion, 'marks' | 'benches' | 'mirrorMarks'>,
 ): SpecCushion {
-  const { cut, buttons, zipEdge } = spec;
+  const { making, make, buttons } = spec;
+  const foam = foamOfCushion(spec);
+  const sawn = making ? outlineExtent(making.foam.outline) : spec.finishedMm;
+  const board = making?.board && outlineExtent(making.board.outline);
   return {
     ...alike,
     kind: spec.kind,
     hand: spec.hand,
     finished: spec.finishedMm,
-    foam: cut.foamMm,
+    make: makeWords(make, spec.kind),
+    foam: { ...sawn, thicknessMm: making?.foam.thicknessMm ?? spec.finishedMm.thicknessMm },
     foamGrade: { ...spec.foam, name: spec.foam.grade },
-    foamVolumeM3: cut.foamVolumeM3,
-    foamMassKg: cut.foamMassKg,
+    foamVolumeM3: foam?.volumeM3 ?? 0,
+    foamMassKg: foam?.massKg ?? 0,
     ...(spec.curve && { curve: spec.curve }),
-    plates: cut.plates,
-    board: cut.boardMm,
-    boxing: cut.boxing,
-    zip: {
-      edge: zipEdge === 'back' ? 'back' : 'front',
-      edgeMm: cut.zip.edgeMm,
-      wrapMm: cut.zip.wrapMm,
-      halfWidthMm: cut.zipPanel.halfWidthMm,
-      halfLengthMm: cut.zipPanel.lengthMm,
+    panels: (making?.panels ?? []).map(({ name, count, cut }) => {
+      const { widthMm, depthMm } = outlineExtent(cut);
+      return { name, count, widthMm, heightMm: depthMm };
+    }),
+    ...(board && { board }),
+    closure: {
+      word: CLOSURE_WORDS[make.closure],
+      edge: make.closureEdge,
+      edgeMm: making?.closure.edgeMm ?? 0,
+      wrapMm: making?.closure.wrapMm ?? 0,
     },
-    weltMm: cut.welt.lengthMm,
-    perimeterMm: cut.perimeterMm,
+    weltMm: making?.welt.lengthMm ?? 0,
+    perimeterMm: making?.perimeterMm ?? outlinePerimeter(spec.outline),
+    faults: spec.faults,
     buttons: {
       columnsMm: buttons.columns.map(({ fromSeamMm }) => fromSeamMm),
       rowsMm: buttons.rowsMm,

@@ -64,12 +64,11 @@ function drawHeroSize(sheet: Sheet, cushion: SpecCushion, { units }: SpecPack, x
 
 function factsOf(cushion: SpecCushion, pack: SpecPack): Fact[] {
   const { units, words } = pack;
-  const { boxing, plates, board, zip } = cushion;
+  const { panels, board, closure } = cushion;
   const show = (mm: number) => formatLength(mm, { ...units, feet: false });
   const count = cushion.buttons.columnsMm.length * cushion.buttons.rowsMm.length;
   const on = cushion.benches.map((bench, i) => `${cushion.marks[i]} for ${bench}`);
   const made = `${on.slice(0, 6).join(', ')}${on.length > 6 ? ' …' : ''}`;
-  const zipLength = zipLengthMm(cushion, units);
   const facts: [string, string][] = [
     ['Make', `${cushion.marks.length}, ${handWords(cushion.hand)}: ${made}${mirrorWords(cushion)}`],
     ['Edges', cushion.meets],
@@ -78,20 +77,24 @@ function factsOf(cushion: SpecCushion, pack: SpecPack): Fact[] {
       `${sizeWords(cushion.foam, units)}, ${foamWords(cushion, units)}; ` +
         `${volumeWords(cushion.foamVolumeM3, units)}, ${massWords(cushion.foamMassKg, units)} each`,
     ],
+    ['Made', cushion.faults.length > 0 ? `NOT as asked: ${cushion.faults.join('; ')}` : cushion.make],
     [
       'Cut',
-      `2 plates ${pairWords(plates.widthMm, plates.depthMm, units)}; boxing ` +
-        `${pairWords(boxing.cutHeightMm, boxing.cutLengthMm, units)}; 2 zip halves ` +
-        pairWords(zip.halfWidthMm, zip.halfLengthMm, units),
+      panels
+        .map(
+          ({ name, count, widthMm, heightMm }) => `${count} ${name} ${pairWords(widthMm, heightMm, units)}`,
+        )
+        .join('; '),
     ],
-    ['Welt', `both seams, 2 × ${show(cushion.perimeterMm)} and joins: ${runWords(cushion.weltMm, units)}`],
+    ['Welt', cushion.weltMm > 0 ? `seams and joins: ${runWords(cushion.weltMm, units)}` : 'none'],
     [
       'Closure',
-      `Zip ${zipWords(cushion, units)}; boxing ${show(cushion.perimeterMm - zipLength)} makes up ` +
-        `${show(cushion.perimeterMm)} round`,
+      closure.edgeMm > 0
+        ? `${closure.word} ${closureWords(cushion, units)} of ${show(cushion.perimeterMm)} round`
+        : closure.word,
     ],
     ['Buttons', count > 0 ? `${count}${words.buttons ? `, ${brief(words.buttons)}` : ''}` : 'none'],
-    ['Board', `${pairWords(board.widthMm, board.depthMm, units)}, if one is asked for`],
+    ['Board', board ? pairWords(board.widthMm, board.depthMm, units) : ''],
     ['Curve', cushion.curve ? curveWords(cushion.curve, units) : ''],
     ['Cover', words.cover && brief(words.cover)],
     ['Fixing', words.fixing && brief(words.fixing)],
@@ -111,15 +114,13 @@ function brief(words: string): string {
   return words.length <= 90 ? words : 'see sheet 1';
 }
 
-/** The zip as a sum of rounded parts, so that it closes. */
-function zipLengthMm({ zip }: SpecCushion, units: SpecPack['units']): number {
+/** The closure as a sum of rounded parts, so that it closes. */
+export function closureWords({ closure }: SpecCushion, units: SpecPack['units']): string {
   const step = lengthStep(units);
   const round = (mm: number) => Math.round(mm / step) * step;
-  return round(zip.edgeMm) + 2 * round(zip.wrapMm);
-}
-
-export function zipWords(cushion: SpecCushion, units: SpecPack['units']): string {
-  const wrap = bareLength(cushion.zip.wrapMm, units);
-  const whole = formatLength(zipLengthMm(cushion, units), { ...units, feet: false });
-  return `${whole} = ${wrap} + ${bareLength(cushion.zip.edgeMm, units)} + ${wrap}`;
+  const whole = round(closure.edgeMm) + 2 * round(closure.wrapMm);
+  const shown = formatLength(whole, { ...units, feet: false });
+  if (closure.wrapMm === 0) return shown;
+  const wrap = bareLength(closure.wrapMm, units);
+  return `${shown} = ${wrap} + ${bareLength(closure.edgeMm, units)} + ${wrap}`;
 }

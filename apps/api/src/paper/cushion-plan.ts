@@ -12,7 +12,7 @@ export function drawCushionPlan(sheet: Sheet, plan: CushionPlan, place: PlanPlac
   sheet.rect(x, y, width, depth, { pen: PEN.edge });
   sheet.rect(x + 0.9, y + 0.9, width - 1.8, depth - 1.8, { pen: PEN.hair });
   drawWall(sheet, plan, { x, y, width, depth, place });
-  drawZip(sheet, plan, { x, y, width, depth, factor: place.factor });
+  drawClosure(sheet, plan, { x, y, width, depth, factor: place.factor });
   for (const column of plan.columnsMm) {
     for (const row of plan.rowsMm) drawButton(sheet, across(column), y + row * place.factor);
   }
@@ -46,23 +46,26 @@ function drawButton(sheet: Sheet, x: number, y: number): void {
   }
 }
 
-function drawZip(
+function drawClosure(
   sheet: Sheet,
   plan: CushionPlan,
   at: { x: number; y: number; width: number; depth: number; factor: number },
 ): void {
   const { x, width } = at;
-  const inwards = plan.zip.edge === 'back' ? 1 : -1;
-  const edge = plan.zip.edge === 'back' ? at.y : at.y + at.depth;
-  const end = edge + inwards * plan.zip.wrapMm * at.factor;
+  const { closure } = plan;
+  // Closures in the ends are said in words alone.
+  if (!closure || closure.edge === 'left' || closure.edge === 'right') return;
+  const inwards = closure.edge === 'back' ? 1 : -1;
+  const edge = closure.edge === 'back' ? at.y : at.y + at.depth;
+  const end = edge + inwards * closure.wrapMm * at.factor;
   sheet.line(x, edge, x + width, edge, { pen: PEN.cut });
   for (const side of [x, x + width]) {
     sheet.line(side, edge, side, end, { pen: PEN.cut });
     sheet.line(side - 1.6, end, side + 1.6, end, { pen: PEN.edge });
   }
   if (Math.abs(end - edge) > 7 && width > 60) {
-    sheet.flag('zip end', x + 3, end + 1.1);
-    sheet.flag('zip end', x + width - 3, end + 1.1, { align: 'right' });
+    sheet.flag('ends here', x + 3, end + 1.1);
+    sheet.flag('ends here', x + width - 3, end + 1.1, { align: 'right' });
   }
 }
 
@@ -100,7 +103,7 @@ function nameEdges(
   const words = (edge: 'back' | 'front') =>
     firstThatFits(
       sheet,
-      [plan.zip.edge === edge ? `${plan.edges[edge]} · ${plan.zip.words}` : '', plan.edges[edge]],
+      [plan.closure?.edge === edge ? `${plan.edges[edge]} · ${plan.closure.words}` : '', plan.edges[edge]],
       room,
     );
   if (depth >= 14) {
@@ -109,8 +112,8 @@ function nameEdges(
     const front = words('front');
     if (front) sheet.flag(front, middle, y + depth - 2, { align: 'center' });
   }
-  const wrap = plan.zip.wrapMm * factor + 3;
-  const [above, below] = plan.zip.edge === 'back' ? [Math.max(6, wrap), 3] : [3, Math.max(6, wrap)];
+  const wrap = (plan.closure?.wrapMm ?? 0) * factor + 3;
+  const [above, below] = plan.closure?.edge === 'back' ? [Math.max(6, wrap), 3] : [3, Math.max(6, wrap)];
   flagUpright(sheet, plan.edges.left, x + 4, y + above, depth - above - below);
   flagUpright(sheet, plan.edges.right, x + width - 1.8, y + above, depth - above - below);
 }

@@ -1,7 +1,7 @@
 import { formatLength, lengthStep, scaleFor } from '@settlewright/geometry';
 import { CHECK_BAR_MM, drawCheckBar } from './check-bar';
 import { spaceAbove, spaces } from './cushion-chains';
-import { drawFactsColumn, FACTS_WIDTH_MM, PAD, zipWords } from './cushion-facts';
+import { closureWords, drawFactsColumn, FACTS_WIDTH_MM, PAD } from './cushion-facts';
 import { drawCushionPlan } from './cushion-plan';
 import { drawCushionCut, drawCushionFront } from './cushion-views';
 import { paragraph } from './paragraph';
@@ -85,7 +85,7 @@ function drawFigures(sheet: Sheet, pack: SpecPack, cushion: SpecCushion, frame: 
 }
 
 function planOf(cushion: SpecCushion, { units }: SpecPack): CushionPlan {
-  const { zip, edges, finished } = cushion;
+  const { closure, edges, finished } = cushion;
   const { rowsMm, columnsMm, datum, boardLinesMm } = cushion.buttons;
   const { side, name, toSeamMm, columnsMm: fromDatum } = datum;
   return {
@@ -97,7 +97,14 @@ function planOf(cushion: SpecCushion, { units }: SpecPack): CushionPlan {
     boardLinesMm,
     wall: datum.drawn ? { side, gapMm: toSeamMm, columnsMm: fromDatum, name } : null,
     edges,
-    zip: { edge: zip.edge, wrapMm: zip.wrapMm, words: `zip ${zipWords(cushion, units)}` },
+    closure:
+      closure.edgeMm > 0
+        ? {
+            edge: closure.edge,
+            wrapMm: closure.wrapMm,
+            words: `${closure.word} ${closureWords(cushion, units)}`,
+          }
+        : null,
   };
 }
 

@@ -5,17 +5,7 @@ import type { Pack } from './pack';
 import { type Column, drawFacts, drawHead, drawRow, type Fact, factHeight, rowHeight } from './ruled-table';
 import { PEN, type Sheet } from './sheet';
 import type { SpecCushion, SpecPack } from './spec-pack';
-import {
-  bareLength,
-  foamWords,
-  isMetric,
-  marksWords,
-  massWords,
-  pairWords,
-  runWords,
-  sizeWords,
-  volumeWords,
-} from './spec-words';
+import { foamWords, isMetric, marksWords, massWords, runWords, sizeWords, volumeWords } from './spec-words';
 import { type Frame, frameOf } from './title-block';
 
 const PAD = 4;
@@ -176,9 +166,8 @@ function listColumns(width: number): Column[] {
     ['Kind, hand', 30],
     ['FINISHED, seam to seam', 44],
     ['Foam', 40],
-    ['Plates, cut', 31],
-    ['Boxing, cut', 27],
-    ['Zip', 19],
+    ['Made', 58],
+    ['Closure', 19],
     ['Welt', 20],
   ];
   const whole = shares.reduce((sum, [, share]) => sum + share, 0);
@@ -195,9 +184,8 @@ function listRow(cushion: SpecCushion, { units }: SpecPack): string[] {
     cushion.hand === 'either' ? cushion.kind : `${cushion.kind}, ${cushion.hand} hand`,
     sizeWords(cushion.finished, units),
     sizeWords(cushion.foam, units),
-    pairWords(cushion.plates.widthMm, cushion.plates.depthMm, units),
-    `${bareLength(cushion.boxing.cutHeightMm, units)} × ${show(cushion.boxing.cutLengthMm)}`,
-    show(cushion.zip.edgeMm + 2 * cushion.zip.wrapMm),
+    cushion.faults.length > 0 ? `NOT as asked: ${cushion.faults.join('; ')}` : cushion.make,
+    show(cushion.closure.edgeMm + 2 * cushion.closure.wrapMm),
     show(cushion.weltMm),
   ];
 }

@@ -1,3 +1,4 @@
+import type { CushionEdge } from '@settlewright/geometry';
 /** A cushion laid flat, in real millimetres. Page left and right, since the paper is read that way. */
 export interface CushionPlan {
   widthMm: number;
@@ -11,7 +12,7 @@ export interface CushionPlan {
   /** Board joints under the cushion, measured like the columns. */
   boardLinesMm: readonly number[];
   wall: { side: 'left' | 'right'; gapMm: number; columnsMm: readonly number[]; name: string } | null;
-  zip: { edge: 'back' | 'front'; wrapMm: number; words: string };
+  closure: { edge: CushionEdge; wrapMm: number; words: string } | null;
   edges: { back: string; front: string; left: string; right: string };
 }
 

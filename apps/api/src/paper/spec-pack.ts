@@ -1,4 +1,4 @@
-import type { Drawing, LengthStyle } from '@settlewright/geometry';
+import type { CushionEdge, Drawing, LengthStyle } from '@settlewright/geometry';
 import type { Paper } from './pack';
 
 export interface Size {
@@ -50,11 +50,13 @@ export interface SpecCushion {
   foamMassKg: number;
   /** Of a back cushion on a curved back: apex over the pressed seat, and how far it gives way below. */
   curve?: { apexMm: number; recessMm: number };
-  plates: { widthMm: number; depthMm: number };
-  board: { widthMm: number; depthMm: number };
-  boxing: { cutHeightMm: number; cutLengthMm: number; finishedLengthMm: number };
-  /** Along one long edge and round both its corners; with the boxing it makes up the perimeter. */
-  zip: { edge: 'back' | 'front'; edgeMm: number; wrapMm: number; halfWidthMm: number; halfLengthMm: number };
+  /** Construction, closure and welt in words. */
+  make: string;
+  /** What is cut of the cover, every allowance included. */
+  panels: readonly { name: string; count: number; widthMm: number; heightMm: number }[];
+  board?: { widthMm: number; depthMm: number };
+  /** Along one edge and round both its ends. */
+  closure: { word: string; edge: CushionEdge; edgeMm: number; wrapMm: number };
   weltMm: number;
   perimeterMm: number;
   buttons: ButtonPlan;
@@ -62,6 +64,8 @@ export interface SpecCushion {
   edges: { back: string; front: string; left: string; right: string };
   /** What each edge meets, in one sentence. */
   meets: string;
+  /** Why it cannot be made as asked; empty where it can. */
+  faults: readonly string[];
 }
 
 /** The words of the order that stand on every pack. */

@@ -3123,7 +3123,7 @@ export interface components {
         };
         DocumentChangeDto: {
             /** @enum {string} */
-            kind: "parameter" | "piece" | "seating" | "asked" | "known-difference" | "group" | "view";
+            kind: "parameter" | "piece" | "seating" | "asked" | "known-difference" | "group" | "view" | "dimension" | "cushion";
             pieceId?: string;
             mark?: string;
             /** @description path of the parameter in its piece */
@@ -3487,49 +3487,53 @@ export interface components {
             left: number;
             right: number;
         };
-        CushionFaceDto: {
-            widthMm: number;
-            depthMm: number;
+        CushionMakeDto: {
+            /** @enum {string} */
+            construction: "boxed" | "tight-boxed" | "knife-edge" | "waterfall" | "bullnose" | "plywood-backed";
+            /** @enum {string} */
+            closure: "zip" | "hook-and-loop" | "hand-sewn" | "stapled";
+            /** @enum {string} */
+            closureEdge: "back" | "front" | "left" | "right";
+            /** @enum {string} */
+            welt: "none" | "straight" | "bias";
         };
-        CushionPlatesDto: {
-            widthMm: number;
-            depthMm: number;
-            /** @enum {number} */
-            count: 2;
+        OutlineCornerDto: {
+            at: number[];
+            radiusMm: number;
+            edge: string;
         };
-        CushionZipDto: {
+        CutPanelDto: {
+            name: string;
+            count: number;
+            finished: components["schemas"]["OutlineCornerDto"][];
+            cut: components["schemas"]["OutlineCornerDto"][];
+            marksMm: number[];
+        };
+        CutSlabDto: {
+            outline: components["schemas"]["OutlineCornerDto"][];
+            thicknessMm: number;
+        };
+        CutBoardDto: {
+            outline: components["schemas"]["OutlineCornerDto"][];
+        };
+        CushionClosureDto: {
             edgeMm: number;
             wrapMm: number;
             lengthMm: number;
         };
-        CushionZipPanelDto: {
-            /** @enum {number} */
-            count: 2;
-            halfWidthMm: number;
-            lengthMm: number;
-        };
-        CushionBoxingDto: {
-            finishedLengthMm: number;
-            cutLengthMm: number;
-            cutHeightMm: number;
-        };
         CushionWeltDto: {
-            /** @enum {number} */
-            seams: 2;
+            seams: number;
             alongSeamsMm: number;
             joinsMm: number;
             lengthMm: number;
         };
-        CushionCutDto: {
-            foamMm: components["schemas"]["CushionSizeDto"];
-            foamVolumeM3: number;
-            foamMassKg: number;
-            boardMm: components["schemas"]["CushionFaceDto"];
-            plates: components["schemas"]["CushionPlatesDto"];
+        CushionPanelsDto: {
+            panels: components["schemas"]["CutPanelDto"][];
+            foam: components["schemas"]["CutSlabDto"];
+            board?: components["schemas"]["CutBoardDto"];
             perimeterMm: number;
-            zip: components["schemas"]["CushionZipDto"];
-            zipPanel: components["schemas"]["CushionZipPanelDto"];
-            boxing: components["schemas"]["CushionBoxingDto"];
+            edgeHeightMm: number;
+            closure: components["schemas"]["CushionClosureDto"];
             welt: components["schemas"]["CushionWeltDto"];
         };
         CushionFoamDto: {
@@ -3548,7 +3552,10 @@ export interface components {
             rowsMm: number[];
             count: number;
             /** @enum {string} */
-            alignedTo: "joints" | "board-centres";
+            pattern: "grid" | "staggered";
+            /** @enum {string} */
+            alignedTo: "joints" | "board-centres" | "field";
+            rowsOverSeat?: components["schemas"]["RowsOverSeatDto"];
         };
         /** @enum {string} */
         CushionDatumMeets: "wall" | "end-wall" | "arm" | "bench-end";
@@ -3573,9 +3580,12 @@ export interface components {
             gapsMm: components["schemas"]["CushionGapsDto"];
             /** @description seam to seam */
             finishedMm: components["schemas"]["CushionSizeDto"];
-            cut: components["schemas"]["CushionCutDto"];
-            /** @enum {string} */
-            zipEdge: "back" | "bottom";
+            make: components["schemas"]["CushionMakeDto"];
+            outline: components["schemas"]["OutlineCornerDto"][];
+            /** @description absent where it cannot be made as asked */
+            making?: components["schemas"]["CushionPanelsDto"];
+            faults: string[];
+            warnings: components["schemas"]["CushionWarningDto"][];
             foam: components["schemas"]["CushionFoamDto"];
             buttons: components["schemas"]["ButtonTableDto"];
             boardLinesMm: number[];
@@ -3726,17 +3736,46 @@ export interface components {
             /** Format: date-time */
             at: string;
         };
+        CushionWarningDto: {
+            /** @enum {string} */
+            code: "off-joint" | "buttons-outside" | "closure-on-camera-side";
+            columns?: number;
+            furthestMm?: number;
+            count?: number;
+            /** @enum {string} */
+            edge?: "back" | "front" | "left" | "right";
+        };
         PublicOrderDto: {
             workshop: components["schemas"]["PublicWorkshopDto"];
             number: number;
             title: string;
             productionName: string;
             setName: string;
+        TuftFieldDto: {
+            across: number;
+            high: number;
+            widthMm: number;
+            heightMm: number;
+            borderMm: number;
+        };
+        CushionTuftingDto: {
+            /** @enum {string} */
+            kind: "none" | "pull-in" | "biscuit" | "diamond";
+            pullMm: number;
+            field?: components["schemas"]["TuftFieldDto"];
+            /** @enum {string} */
+            fullness?: "foam-thickness" | "half-again";
+        };
             /** @description the upholsterer the order is for */
             upholstererName: string;
             state: components["schemas"]["OrderState"];
             revisionLetter: string;
             /** Format: date-time */
+        RowsOverSeatDto: {
+            overMm: number[];
+            sinkMm: number;
+            goesDown: boolean;
+        };
             revisionIssuedAt: string;
             /** Format: date */
             neededBy: string | null;
@@ -3771,9 +3810,14 @@ export interface components {
             before: string;
             /** @description the name, or the part of it, as it was written */
             name: string;
+            tufting: components["schemas"]["CushionTuftingDto"];
             after: string;
             /** @description it went to the upholsterer or came from there */
             alreadySent: boolean;
+            cameraSides: ("back" | "front" | "left" | "right")[];
+            /** @enum {string} */
+            holdDown?: "none" | "non-slip-mesh" | "hook-and-loop" | "snaps" | "turn-buttons" | "french-cleat" | "keyhole-plates";
+            notes?: string;
             /** @description how often the same words stand there, as in earlier drafts */
             copies: number;
         };

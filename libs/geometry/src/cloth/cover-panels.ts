@@ -2,6 +2,7 @@ import { CUSHION_SETTINGS, type CushionSettings } from '../cushions/cushion-sett
 import { biasStripLength, weltStrips } from '../cushions/cushion-sizes.ts';
 import type { CushionMake } from '../cushions/making/cushion-make.ts';
 import type { CushionPanels } from '../cushions/making/cut-panels.ts';
+import { TUFTED_FACE } from '../cushions/making/tufted-face.ts';
 import { outlineExtent } from '../outlines/outline.ts';
 import type { ClothPanel } from './cloth.ts';
 
@@ -24,7 +25,7 @@ export interface CoveredCushion {
 }
 
 /** Panels whose pattern is placed: the faces that are looked at. */
-const FACES: ReadonlySet<string> = new Set(['plate', 'cover', 'top, front and bottom']);
+const FACES: ReadonlySet<string> = new Set(['plate', TUFTED_FACE, 'cover', 'top, front and bottom']);
 
 /** Width that panels may take up. */
 export const usableWidthMm = ({ widthMm, selvedgeMm }: CoverCloth): number => widthMm - 2 * selvedgeMm;

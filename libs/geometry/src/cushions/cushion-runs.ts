@@ -1,6 +1,8 @@
 import { benchLayout } from '../pieces/bench-layout.ts';
 import type { PieceOf, SetDocument } from '../room/document.ts';
 import { boardLines } from './board-lines.ts';
+import { cushionKey } from './cushion-key.ts';
+import { divideAt, divideOnBoards, divideRun } from './run-joints.ts';
 
 /** A piece that carries cushions. */
 export type CushionedPiece = PieceOf<'bench'> | PieceOf<'loose-seat'>;
@@ -19,38 +21,21 @@ export interface CushionRun {
 }
 
 /**
- * Divides a run into equal stretches no longer than a limit; a division goes to the nearest board joint
- * when that keeps both neighbours within the limit.
+ * Where a bench's run of cushions is divided.
  *
- * @param leftMm - start of the run
- * @param rightMm - end of the run, greater than `leftMm`
- * @param longestMm - longest stretch allowed, > 0
- * @param jointsMm - preferred places for a division
- * @returns the ends of the stretches, rising, both ends of the run included
+ * @param bench - the bench
+ * @param kind - seats or backs
+ * @returns ends of the stretches along the bench's x axis, rising, both ends of the run included
  */
-export function divideRun(
-  leftMm: number,
-  rightMm: number,
-  longestMm: number,
-  jointsMm: readonly number[],
-): number[] {
-  const length = rightMm - leftMm;
-  const count = Math.max(1, Math.ceil(length / longestMm - 1e-9));
-  const ends = [leftMm];
-  for (let i = 1; i < count; i += 1) {
-    const even = leftMm + (length * i) / count;
-    const before = ends[ends.length - 1]!;
-    const stretchesAfter = count - i;
-    const fitting = jointsMm.filter(
-      (joint) =>
-        joint > before + 1 &&
-        joint - before <= longestMm + 1e-6 &&
-        rightMm - joint <= stretchesAfter * longestMm + 1e-6,
-    );
-    const nearest = fitting.sort((a, b) => Math.abs(a - even) - Math.abs(b - even))[0];
-    ends.push(nearest !== undefined && Math.abs(nearest - even) < length / count / 4 ? nearest : even);
-  }
-  return [...ends, rightMm];
+export function runJointEnds(bench: PieceOf<'bench'>, kind: 'seat' | 'back'): number[] {
+  const { cushionLeftMm: left, cushionRightMm: right, hasBack } = benchLayout(bench);
+  const { longestCushionMm: longest, joints } = bench.upholstery;
+  const chosen = joints?.[kind];
+  if (chosen?.by === 'positions') return divideAt(left, right, chosen.atMm);
+  const { jointsMm } = boardLines(bench);
+  return chosen
+    ? divideOnBoards(left, right, longest, jointsMm)
+    : divideRun(left, right, longest, hasBack ? jointsMm : []);
 }
 
 /**
@@ -64,21 +49,23 @@ export function cushionRuns(piece: CushionedPiece): CushionRun[] {
     if (piece.seatCushion.thicknessMm <= 0) return [];
     const half = piece.widthMm / 2;
     return [
-      { key: `${piece.id}/seat-1`, piece, kind: 'seat', index: 0, count: 1, leftMm: -half, rightMm: half },
+      {
+        key: cushionKey({ pieceId: piece.id, kind: 'seat', number: 1 }),
+        piece,
+        kind: 'seat',
+        index: 0,
+        count: 1,
+        leftMm: -half,
+        rightMm: half,
+      },
     ];
   }
   const layout = benchLayout(piece);
-  const { jointsMm } = boardLines(piece);
-  const ends = divideRun(
-    layout.cushionLeftMm,
-    layout.cushionRightMm,
-    piece.upholstery.longestCushionMm,
-    layout.hasBack ? jointsMm : [],
-  );
-  const count = ends.length - 1;
-  const runs = (kind: 'seat' | 'back'): CushionRun[] =>
-    Array.from({ length: count }, (_, index) => ({
-      key: `${piece.id}/${kind}-${index + 1}`,
+  const runs = (kind: 'seat' | 'back'): CushionRun[] => {
+    const ends = runJointEnds(piece, kind);
+    const count = ends.length - 1;
+    return Array.from({ length: count }, (_, index) => ({
+      key: cushionKey({ pieceId: piece.id, kind, number: index + 1 }),
       piece,
       kind,
       index,
@@ -86,6 +73,7 @@ export function cushionRuns(piece: CushionedPiece): CushionRun[] {
       leftMm: ends[index]!,
       rightMm: ends[index + 1]!,
     }));
+  };
   return [
     ...(piece.seatCushion.thicknessMm > 0 ? runs('seat') : []),
     ...(layout.hasBack && piece.backCushion.thicknessMm > 0 ? runs('back') : []),

@@ -36,6 +36,7 @@ export const CUSHION_SETTINGS = {
   tightBoxing: inches(1 / 4, 'tight boxing cut higher than the foam, seams included', 'published source'),
   boardFoamOver: inches(3 / 8, 'foam larger than its board, on every side', 'published source'),
   pull: inches(5 / 2, 'cover pulled round and stapled under the board', 'published source'),
+  buttonPull: inches(3 / 8, 'how far a button without fullness is pulled in', 'from memory'),
   buttonToEdge: inches(4, 'least distance of a button from the edge', 'from memory'),
 } as const satisfies Record<string, CushionSetting>;
 

@@ -6,8 +6,10 @@ const length = (min: number, max: number) => z.number().min(min).max(max);
 /** What is cut out of an edge: a column, a sill, the short leg of an L. */
 const notchSchema = z.strictObject({
   edge: z.enum(['back', 'front', 'left', 'right']),
-  /** Along back and front from the sitter's left end, along the sides from the back. */
+  /** Along back and front from one end, along the sides from the back. */
   fromMm: length(0, 12000),
+  /** The end of the back or front it is measured from, as the sitter sees it; the left one when absent. */
+  fromEnd: z.enum(['left', 'right']).optional(),
   widthMm: length(5, 12000),
   depthMm: length(5, 2000),
 });
@@ -80,29 +82,37 @@ function fourCorners({ widthMm, depthMm }: SizeInPlan, shape: CushionShape): Out
   ];
 }
 
-/** An edge runs anticlockwise; these are measured from its end, the others from its start. */
-const MEASURED_FROM_END: ReadonlySet<EdgeName> = new Set(['front', 'left']);
+/** Whether a notch is measured from the end of its edge, which runs anticlockwise, and not from its start. */
+function isFromEnd({ edge, fromEnd = 'left' }: Notch): boolean {
+  if (edge === 'left' || edge === 'right') return edge === 'left';
+  return (edge === 'front') === (fromEnd === 'left');
+}
 
 function notched(corners: OutlineCorner[], notches: readonly Notch[]): OutlineCorner[] | string {
   let cut: OutlineCorner[] | string = corners;
   for (const name of ['front', 'left', 'back', 'right'] as const) {
-    const here = notches.filter(({ edge }) => edge === name).sort((a, b) => a.fromMm - b.fromMm);
+    const asked = notches.filter(({ edge }) => edge === name);
+    if (asked.length === 0) continue;
+    if (!cut.some(({ edge }) => edge === name)) return `nothing is left of the ${name} edge for a notch`;
+    const wholeMm = edgeLength(cut, name);
+    const here = asked.map((notch) => {
+      const startsAt = isFromEnd(notch) ? wholeMm - notch.fromMm - notch.widthMm : notch.fromMm;
+      return { notch, startsAt };
+    });
     // Cut from the far end of the edge on, so that the earlier stretch keeps its place.
-    for (const notch of MEASURED_FROM_END.has(name) ? here : here.reverse()) {
-      cut = cutNotch(cut, notch);
+    for (const { notch, startsAt } of here.sort((a, b) => b.startsAt - a.startsAt)) {
+      cut = cutNotch(cut, notch, startsAt);
       if (typeof cut === 'string') return cut;
     }
   }
   return cut;
 }
 
-function cutNotch(corners: OutlineCorner[], notch: Notch): OutlineCorner[] | string {
+function cutNotch(corners: OutlineCorner[], notch: Notch, startsAt: number): OutlineCorner[] | string {
   const i = corners.findIndex(({ edge }) => edge === notch.edge);
   const from = corners[i]!;
   const nextIndex = (i + 1) % corners.length;
   const to = corners[nextIndex]!;
-  const whole = edgeLength(corners, notch.edge);
-  const startsAt = MEASURED_FROM_END.has(notch.edge) ? whole - notch.fromMm - notch.widthMm : notch.fromMm;
   const lengthMm = Math.hypot(to.at[0] - from.at[0], to.at[1] - from.at[1]);
   const endsAt = startsAt + notch.widthMm;
   if (startsAt < -1e-6 || endsAt > lengthMm + 1e-6) {

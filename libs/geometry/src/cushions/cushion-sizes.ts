@@ -7,62 +7,6 @@ export interface CushionSize {
   thicknessMm: number;
 }
 
-/** Everything that follows from the finished size of a boxed cushion with a zip in one long edge. */
-export interface CushionCut {
-  foamMm: CushionSize;
-  foamVolumeM3: number;
-  foamMassKg: number;
-  boardMm: { widthMm: number; depthMm: number };
-  plates: { count: 2; widthMm: number; depthMm: number };
-  perimeterMm: number;
-  /** Closed edge plus what goes round both corners; with the boxing it makes up the perimeter. */
-  zip: { edgeMm: number; wrapMm: number; lengthMm: number };
-  zipPanel: { count: 2; halfWidthMm: number; lengthMm: number };
-  boxing: { finishedLengthMm: number; cutLengthMm: number; cutHeightMm: number };
-  welt: { seams: 2; alongSeamsMm: number; joinsMm: number; lengthMm: number };
-}
-
-/**
- * Foam, cloth, zip and welt of a boxed cushion.
- *
- * @param finished - seam to seam, millimetres, each > 0
- * @param foamDensityKgM3 - of the foam
- * @param settings - allowances
- * @returns sizes to cut; lengths millimetres
- * @source foam finished + 1/2 in, plates finished + 2 seams, zip 3 in round each back corner: upholstery
- * trade pages; both welt seams are twice the perimeter and a join each
- */
-export function cutCushion(
-  finished: CushionSize,
-  foamDensityKgM3: number,
-  settings: CushionSettings = CUSHION_SETTINGS,
-): CushionCut {
-  const { widthMm, depthMm, thicknessMm } = finished;
-  const seam = settings.seam.valueMm;
-  const over = settings.foamOversize.valueMm;
-  const under = settings.boardSmaller.valueMm;
-  const foamMm = { widthMm: widthMm + over, depthMm: depthMm + over, thicknessMm };
-  const foamVolumeM3 = (foamMm.widthMm * foamMm.depthMm * foamMm.thicknessMm) / 1e9;
-  const perimeterMm = 2 * (widthMm + depthMm);
-  const wrapMm = Math.min(settings.zipWrap.valueMm, depthMm);
-  const zipLength = widthMm + 2 * wrapMm;
-  const boxingLength = perimeterMm - zipLength;
-  const cutHeightMm = thicknessMm + 2 * seam;
-  const joinsMm = 2 * settings.weltJoin.valueMm;
-  return {
-    foamMm,
-    foamVolumeM3,
-    foamMassKg: foamVolumeM3 * foamDensityKgM3,
-    boardMm: { widthMm: Math.max(0, widthMm - under), depthMm: Math.max(0, depthMm - under) },
-    plates: { count: 2, widthMm: widthMm + 2 * seam, depthMm: depthMm + 2 * seam },
-    perimeterMm,
-    zip: { edgeMm: widthMm, wrapMm, lengthMm: zipLength },
-    zipPanel: zipPanel(zipLength, cutHeightMm, settings),
-    boxing: { finishedLengthMm: boxingLength, cutLengthMm: boxingLength + 2 * seam, cutHeightMm },
-    welt: { seams: 2, alongSeamsMm: 2 * perimeterMm, joinsMm, lengthMm: 2 * perimeterMm + joinsMm },
-  };
-}
-
 /**
  * The two halves of a zip panel.
  *
@@ -76,7 +20,7 @@ export function zipPanel(
   finishedLengthMm: number,
   boxingCutHeightMm: number,
   settings: CushionSettings = CUSHION_SETTINGS,
-): CushionCut['zipPanel'] {
+): { count: 2; halfWidthMm: number; lengthMm: number } {
   return {
     count: 2,
     halfWidthMm: (boxingCutHeightMm + settings.zipAllowance.valueMm) / 2,

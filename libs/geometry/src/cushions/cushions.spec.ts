@@ -1,12 +1,16 @@
 import { describe, expect, it } from 'vitest';
+import { outlineExtent } from '../outlines/outline.ts';
 import { ARRANGEMENTS } from '../room/arrangements.ts';
 import type { PieceOf, SetDocument } from '../room/document.ts';
 import { boardLines } from './board-lines.ts';
 import { buttonColumns, buttonRows, diamondField } from './button-grid.ts';
-import { divideRun } from './cushion-runs.ts';
-import { biasStripLength, cutCushion, weltStrips, zipPanel } from './cushion-sizes.ts';
+import { biasStripLength, weltStrips, zipPanel } from './cushion-sizes.ts';
 import { deriveCushions } from './derive-cushions.ts';
+import { foamOfCushion } from './foam-of-cushion.ts';
 import { groupCushions } from './group-cushions.ts';
+import { makeCushion } from './making/make-cushion.ts';
+import { PLAIN_MAKE } from './making/cushion-make.ts';
+import { divideRun } from './run-joints.ts';
 
 const inch = (value: number): number => value * 25.4;
 const LB_FT3 = 16.018463;
@@ -21,33 +25,29 @@ function withBenches(id: string, change: (bench: PieceOf<'bench'>) => void): Set
 }
 
 describe('a boxed cushion 72 x 20 x 4 in', () => {
-  const cut = cutCushion({ widthMm: inch(72), depthMm: inch(20), thicknessMm: inch(4) }, 2.8 * LB_FT3);
-
-  // Worked by hand from the trade's rules (seam 1/2, zip 3 in round each corner, join 3 in a seam).
-  it('is cut as worked by hand', () => {
-    expect(cut.plates.widthMm).toBeCloseTo(inch(73), 6);
-    expect(cut.plates.depthMm).toBeCloseTo(inch(21), 6);
-    expect(cut.zip.lengthMm).toBeCloseTo(inch(78), 6);
-    expect(cut.boxing.finishedLengthMm).toBeCloseTo(inch(106), 6);
-    expect(cut.boxing.cutLengthMm).toBeCloseTo(inch(107), 6);
-    expect(cut.boxing.cutHeightMm).toBeCloseTo(inch(5), 6);
-    expect(cut.welt.lengthMm).toBeCloseTo(inch(374), 6);
-    expect(cut.foamMm.widthMm).toBeCloseTo(inch(72.5), 6);
-    expect(cut.foamMm.depthMm).toBeCloseTo(inch(20.5), 6);
-    expect(cut.foamVolumeM3 / 0.0283168466).toBeCloseTo(3.44, 2);
-    expect(cut.foamMassKg / 0.45359237).toBeCloseTo(9.6, 1);
+  const cushion = makeCushion({
+    finishedMm: { widthMm: inch(72), depthMm: inch(20), thicknessMm: inch(4) },
+    make: PLAIN_MAKE,
   });
+  const making = cushion.ok ? cushion.made : undefined;
 
-  it('closes: boxing and zip panel together are the perimeter', () => {
-    expect(cut.boxing.finishedLengthMm + cut.zip.lengthMm).toBeCloseTo(cut.perimeterMm, 9);
+  // Worked by hand from the trade's rules: 72 1/2 x 20 1/2 x 4 in of foam at 2.8 lb/ft3.
+  it('takes so much foam', () => {
+    const foam = foamOfCushion({
+      ...(making && { making }),
+      foam: { grade: 'seat', densityKgM3: 2.8 * LB_FT3, ifd25N: 180, supportFactor: 2 },
+    });
+    expect(foam!.volumeM3 / 0.0283168466).toBeCloseTo(3.44, 2);
+    expect(foam!.massKg / 0.45359237).toBeCloseTo(9.6, 1);
   });
 
   it('takes eight straight welt strips, 12 in of cloth, with join loss and seven without', () => {
     const strip = { clothWidthMm: inch(54), stripWidthMm: inch(1.5) };
-    const withLoss = weltStrips(cut.welt.lengthMm, { ...strip, joinLoss: 'strip-width' });
+    expect(making!.welt.lengthMm).toBeCloseTo(inch(374), 6);
+    const withLoss = weltStrips(making!.welt.lengthMm, { ...strip, joinLoss: 'strip-width' });
     expect(withLoss.strips).toBe(8);
     expect(withLoss.clothMm).toBeCloseTo(inch(12), 6);
-    expect(weltStrips(cut.welt.lengthMm, { ...strip, joinLoss: 'none' }).strips).toBe(7);
+    expect(weltStrips(making!.welt.lengthMm, { ...strip, joinLoss: 'none' }).strips).toBe(7);
   });
 });
 
@@ -220,8 +220,9 @@ describe('the cushions of a set', () => {
   it('keep the invariant of boxing, zip and perimeter everywhere', () => {
     for (const { id } of ARRANGEMENTS) {
       for (const spec of deriveCushions(built(id))) {
-        const { boxing, zip, perimeterMm } = spec.cut;
-        expect(boxing.finishedLengthMm + zip.lengthMm).toBeCloseTo(perimeterMm, 6);
+        const { panels, closure, perimeterMm } = spec.making!;
+        const boxing = panels.find(({ name }) => name === 'boxing')!;
+        expect(outlineExtent(boxing.finished).widthMm + closure.lengthMm).toBeCloseTo(perimeterMm, 6);
         expect(spec.finishedMm.widthMm).toBeLessThanOrEqual(spec.placeMm.widthMm);
       }
     }

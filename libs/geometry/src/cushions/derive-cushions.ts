@@ -1,22 +1,21 @@
 import { benchLayout } from '../pieces/bench-layout.ts';
-import type { PieceOf, SetDocument } from '../room/document.ts';
-import { boardLines, type BoardLines } from './board-lines.ts';
-import { buttonColumns, buttonRows } from './button-grid.ts';
+import type { SetDocument } from '../room/document.ts';
+import { boardLines } from './board-lines.ts';
+import { buttonsOf, rowsOverSeat } from './cushion-buttons.ts';
 import { cushionRunsOf, type CushionRun } from './cushion-runs.ts';
 import { CUSHION_SETTINGS, type CushionSettings } from './cushion-settings.ts';
-import { cutCushion } from './cushion-sizes.ts';
-import type { ButtonTable, CushionDatum, CushionSpec, EdgeMeets } from './cushion-spec.ts';
+import type { CushionDatum, CushionSpec, EdgeMeets } from './cushion-spec.ts';
+import { cushionWarnings } from './cushion-warnings.ts';
+import { madeOf } from './made-of.ts';
 import { runEnds, type RunEndFound } from './run-ends.ts';
 
-type Bench = PieceOf<'bench'>;
 type Ends = Record<'left' | 'right', RunEndFound>;
 
-const NO_BUTTONS: ButtonTable = { columns: [], rowsMm: [], count: 0, alignedTo: 'joints' };
-
 /**
- * Every cushion of a set, with finished, foam and cut sizes and its buttons.
+ * Every cushion of a set, with its finished size, plan, panels, foam and buttons.
  *
- * The finished size, seam to seam, is the place less a fitting gap at each edge; all else follows from it.
+ * The finished size, seam to seam, is the place less a fitting gap at each edge; all else follows from it and from what was
+ * chosen of the cushion.
  *
  * @param document - the set
  * @param settings - allowances of the workshop
@@ -65,7 +64,24 @@ function cushionOf(
   };
   const lines = piece.kind === 'bench' ? boardLines(piece) : undefined;
   const under = (lines?.jointsMm ?? []).filter((x) => x > seams.low + 1e-6 && x < seams.high - 1e-6);
-  return {
+  const choice = document.cushions?.[run.key] ?? {};
+  const { tufting, buttons } = buttonsOf(
+    run,
+    choice.tufting,
+    { seams, seamX, lines, finishedMm, fromDatum },
+    settings,
+  );
+  const standing =
+    kind === 'back' && piece.kind === 'bench' && piece.seatCushion.thicknessMm > 0 && buttons.count > 0
+      ? {
+          rowsOverSeat: rowsOverSeat(piece, buttons.rowsMm, finishedMm.depthMm, {
+            gapMm: gap.front,
+            holdDown: choice.holdDown,
+          }),
+        }
+      : {};
+  const made = madeOf(kind, finishedMm, choice, tufting, settings);
+  const spec = {
     mark,
     key: run.key,
     benchId: piece.id,
@@ -76,23 +92,19 @@ function cushionOf(
     edges: meets,
     placeMm,
     gapsMm: gap,
-    finishedMm,
-    cut: cutCushion(finishedMm, foam.densityKgM3, settings),
-    zipEdge: kind === 'seat' ? 'back' : 'bottom',
+    ...made,
     foam,
+    tufting,
     ...curveOf(run),
-    buttons:
-      piece.kind === 'bench' && lines
-        ? buttonsOf(
-            piece,
-            run,
-            { seams, seamX, lines, depthMm: finishedMm.depthMm, fromDatum, isHigh },
-            settings,
-          )
-        : NO_BUTTONS,
+    buttons: { ...buttons, ...standing },
     boardLinesMm: under.map((x) => Math.abs(x - seamX)).sort((a, b) => a - b),
     datum,
+    cameraSides: choice.cameraSides ?? [],
+    ...(choice.holdDown && { holdDown: choice.holdDown }),
+    ...(choice.notes && { notes: choice.notes }),
   };
+  const onJoints = piece.kind === 'bench' && piece.upholstery.buttons.alignTo === 'joints';
+  return { ...spec, warnings: cushionWarnings({ ...spec, onJoints }) };
 }
 
 function placeOf({ piece, kind }: CushionRun) {
@@ -172,44 +184,4 @@ function datumOf(
   }
   const length = piece.kind === 'bench' ? piece.lengthMm : piece.widthMm;
   return { side: 'right', meets: 'bench-end', xMm: -length / 2 };
-}
-
-interface OnBench {
-  seams: { low: number; high: number };
-  seamX: number;
-  lines: BoardLines;
-  depthMm: number;
-  fromDatum: (x: number) => number;
-  isHigh: boolean;
-}
-
-function buttonsOf(bench: Bench, run: CushionRun, on: OnBench, settings: CushionSettings): ButtonTable {
-  const wanted = bench.upholstery.buttons;
-  if (wanted.rows === 0 || (wanted.on !== 'both' && wanted.on !== run.kind)) {
-    return { ...NO_BUTTONS, alignedTo: wanted.alignTo };
-  }
-  const edgeMm = settings.buttonToEdge.valueMm;
-  const linesMm = wanted.alignTo === 'joints' ? on.lines.jointsMm : on.lines.centresMm;
-  const xs = buttonColumns(on.seams.low, on.seams.high, { linesMm, every: wanted.everyBoards, edgeMm });
-  const rowsMm = xs.length === 0 ? [] : buttonRows(on.depthMm, wanted.rows, edgeMm);
-  const offJoint = (x: number): number => {
-    const nearest = on.lines.jointsMm.reduce(
-      (best, joint) => (Math.abs(joint - x) < Math.abs(best - x) ? joint : best),
-      Infinity,
-    );
-    return Number.isFinite(nearest) ? on.fromDatum(x) - on.fromDatum(nearest) : 0;
-  };
-  const columns = xs
-    .map((x) => ({
-      fromSeamMm: Math.abs(x - on.seamX),
-      fromDatumMm: on.fromDatum(x),
-      offJointMm: offJoint(x),
-    }))
-    .sort((a, b) => a.fromSeamMm - b.fromSeamMm);
-  return {
-    columns: rowsMm.length === 0 ? [] : columns,
-    rowsMm,
-    count: columns.length * rowsMm.length,
-    alignedTo: wanted.alignTo,
-  };
 }

@@ -1,4 +1,7 @@
+import type { OutlineCorner } from '../outlines/outline.ts';
+import type { CushionEdge } from './cushion-choice.ts';
 import type { CushionGroup, CushionSpec } from './cushion-spec.ts';
+import { mirroredOutline } from './mirrored-shape.ts';
 
 /** Lengths are compared on a grid of 1/64 in: fractions of an inch lie on it, so noise of the last digit never parts two. */
 const GRID_MM = 25.4 / 64;
@@ -6,11 +9,18 @@ const GRID_MM = 25.4 / 64;
 type Hand = CushionSpec['hand'];
 
 const OTHER: Record<Hand, Hand> = { left: 'right', right: 'left', either: 'either' };
+const OTHER_EDGE: Record<CushionEdge, CushionEdge> = {
+  left: 'right',
+  right: 'left',
+  back: 'back',
+  front: 'front',
+};
 
-/** All that a drawing shows of a cushion, or of its mirror image. */
+/** All that a drawing shows of a cushion, or of its mirror image; what follows from it alone is left out. */
 function likeness(spec: CushionSpec, mirrored: boolean): string {
-  const { kind, hand, edges, finishedMm, cut, zipEdge, foam, curve, buttons, boardLinesMm, datum } = spec;
+  const { kind, hand, edges, finishedMm, make, foam, curve, buttons, boardLinesMm, datum } = spec;
   const { wallMark: _, side, ...datumLike } = datum;
+  const edge = (one: CushionEdge) => (mirrored ? OTHER_EDGE[one] : one);
   const shown = {
     kind,
     hand: mirrored ? OTHER[hand] : hand,
@@ -18,16 +28,32 @@ function likeness(spec: CushionSpec, mirrored: boolean): string {
     datumSide: mirrored ? OTHER[side] : side,
     datumLike,
     finishedMm,
-    cut,
-    zipEdge,
+    make: { ...make, closureEdge: edge(make.closureEdge) },
+    outline: fromLowest(mirrored ? mirroredOutline(spec.outline) : spec.outline),
+    faults: spec.faults,
     foam,
     curve,
+    tufting: spec.tufting,
     buttons,
     boardLinesMm,
+    cameraSides: spec.cameraSides.map(edge).sort(),
+    holdDown: spec.holdDown,
+    notes: spec.notes,
   };
   return JSON.stringify(shown, (_key, value: unknown) =>
     typeof value === 'number' ? Math.round(value / GRID_MM) : value,
   );
+}
+
+/** The same outline from its lowest corner on, the leftmost of those. */
+function fromLowest(corners: readonly OutlineCorner[]): OutlineCorner[] {
+  const rank = ({ at: [x, y] }: OutlineCorner) => [Math.round(y / GRID_MM), Math.round(x / GRID_MM)] as const;
+  let first = 0;
+  corners.forEach((corner, i) => {
+    const [a, b] = [rank(corner), rank(corners[first]!)];
+    if (a[0] < b[0] || (a[0] === b[0] && a[1] < b[1])) first = i;
+  });
+  return [...corners.slice(first), ...corners.slice(0, first)];
 }
 
 /**

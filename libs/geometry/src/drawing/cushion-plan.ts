@@ -1,5 +1,9 @@
+import type { CushionEdge } from '../cushions/cushion-choice.ts';
 import type { CushionSpec, EdgeMeets } from '../cushions/cushion-spec.ts';
-import { rectangle, WELT_MM } from './cushion-views.ts';
+import { buttonSpots } from '../cushions/cushion-warnings.ts';
+import { closurePath } from '../cushions/making/edge-strip.ts';
+import { offsetFault, offsetOutline, outlinePoints, type OutlineCorner } from '../outlines/outline.ts';
+import { WELT_MM } from './cushion-views.ts';
 import { datumChain, dimensionChain } from './dimension-chain.ts';
 import { drawingOf, type Drawing, type DrawShape, type PagePoint } from './drawing.ts';
 
@@ -32,64 +36,71 @@ export function cushionPlan(spec: CushionSpec, labelMm: number): Drawing {
       pen: 'hair',
       dashed: true,
     })),
-    { kind: 'polygon', points: rectangle(0, 0, w, d), pen: 'edge', fill: 'none' },
-    {
-      kind: 'polygon',
-      points: rectangle(WELT_MM, WELT_MM, w - WELT_MM, d - WELT_MM),
-      pen: 'hair',
-      fill: 'none',
-    },
-    ...zipShapes(spec, labelMm),
+    { kind: 'polygon', points: onPage(spec.outline, d), pen: 'edge', fill: 'none' },
+    ...seamShapes(spec),
+    ...closureShapes(spec, labelMm),
     ...wallShapes(spec, labelMm),
-    ...spec.buttons.columns.flatMap(({ fromSeamMm }) =>
-      spec.buttons.rowsMm.map((row): DrawShape => ({
-        kind: 'circle',
-        centre: [pageX(fromSeamMm), row],
-        radiusMm: BUTTON_RADIUS_MM,
-        pen: 'edge',
-        fill: 'paper',
-      })),
-    ),
+    ...buttonSpots(spec).map(([x, y]): DrawShape => ({
+      kind: 'circle',
+      centre: [x, d - y],
+      radiusMm: BUTTON_RADIUS_MM,
+      pen: 'edge',
+      fill: 'paper',
+    })),
     ...edgeWords(spec, labelMm),
     ...planChains(spec, labelMm),
   ];
   return drawingOf(shapes, labelMm / 2);
 }
 
-function zipShapes(
-  { finishedMm: { widthMm: w, depthMm: d }, cut, zipEdge }: CushionSpec,
-  labelMm: number,
-): DrawShape[] {
-  const y = zipEdge === 'back' ? 0 : d;
-  const end = zipEdge === 'back' ? cut.zip.wrapMm : d - cut.zip.wrapMm;
+/** Outlines run anticlockwise with y up the page; drawings have it down. */
+const onPage = (corners: readonly OutlineCorner[], depthMm: number): PagePoint[] =>
+  outlinePoints(corners, 0.5).map(([x, y]): PagePoint => [x, depthMm - y]);
+
+/** The welt just within the edge, where the outline leaves room for it. */
+function seamShapes({ outline, finishedMm: { depthMm: d } }: CushionSpec): DrawShape[] {
+  const inner = offsetOutline(outline, -WELT_MM);
+  if (offsetFault(outline, inner)) return [];
+  return [{ kind: 'polygon', points: onPage(inner, d), pen: 'hair', fill: 'none' }];
+}
+
+/** The closure along its edge and round both ends, with a tick and a word where it ends. */
+function closureShapes(spec: CushionSpec, labelMm: number): DrawShape[] {
+  const { making, make, outline, finishedMm } = spec;
+  if (!making || making.closure.edgeMm === 0) return [];
+  const path = closurePath(outline, make.closureEdge, making.closure.wrapMm);
+  const page = path.map(([x, y]): PagePoint => [x, finishedMm.depthMm - y]);
   const tick = labelMm / 5;
-  const line = (points: PagePoint[], pen: 'cut' | 'edge'): DrawShape => ({ kind: 'polyline', points, pen });
+  const word = make.closure === 'zip' ? 'zip end' : 'closure end';
+  const ends = [page.slice(0, 2), page.slice(-2).reverse()];
   return [
-    line(
-      [
-        [0, end],
-        [0, y],
-        [w, y],
-        [w, end],
-      ],
-      'cut',
-    ),
-    line(
-      [
-        [-tick, end],
-        [tick, end],
-      ],
-      'edge',
-    ),
-    line(
-      [
-        [w - tick, end],
-        [w + tick, end],
-      ],
-      'edge',
-    ),
-    { kind: 'text', at: [2 * tick, end], text: 'zip end', anchor: 'start' },
-    { kind: 'text', at: [w - 2 * tick, end], text: 'zip end', anchor: 'end' },
+    { kind: 'polyline', points: page, pen: 'cut' },
+    ...ends.flatMap(([end, next]): DrawShape[] => {
+      if (!end || !next || making.closure.wrapMm === 0) return [];
+      const upright = Math.abs(next[0] - end[0]) < Math.abs(next[1] - end[1]);
+      const across = upright ? [tick, 0] : [0, tick];
+      const inwards = upright && end[0] < finishedMm.widthMm / 2 ? 1 : -1;
+      return [
+        {
+          kind: 'polyline',
+          points: [
+            [end[0] - across[0]!, end[1] - across[1]!],
+            [end[0] + across[0]!, end[1] + across[1]!],
+          ],
+          pen: 'edge',
+        },
+        ...(upright
+          ? [
+              {
+                kind: 'text' as const,
+                at: [end[0] + inwards * 2 * tick, end[1]] as PagePoint,
+                text: word,
+                anchor: inwards > 0 ? ('start' as const) : ('end' as const),
+              },
+            ]
+          : []),
+      ];
+    }),
   ];
 }
 
@@ -131,13 +142,14 @@ function edgeWords(spec: CushionSpec, labelMm: number): DrawShape[] {
     anchor: 'middle',
     ...(upright ? { upright } : {}),
   });
-  const zip = (edge: 'back' | 'bottom', text: string): string =>
-    spec.zipEdge === edge ? `${text}, zip` : text;
+  const closed = spec.make.closure === 'zip' ? 'zip' : 'closure';
+  const named = (edge: CushionEdge, text: string): string =>
+    spec.make.closureEdge === edge && (spec.making?.closure.edgeMm ?? 0) > 0 ? `${text}, ${closed}` : text;
   return [
-    words([w / 2, inset], zip('back', EDGE_WORDS[spec.edges.back])),
-    words([w / 2, d - inset], zip('bottom', EDGE_WORDS[spec.edges.front])),
-    words([inset, d / 2], `${EDGE_WORDS[spec.edges.right]}, sitter’s right`, true),
-    words([w - inset, d / 2], `${EDGE_WORDS[spec.edges.left]}, sitter’s left`, true),
+    words([w / 2, inset], named('back', EDGE_WORDS[spec.edges.back])),
+    words([w / 2, d - inset], named('front', EDGE_WORDS[spec.edges.front])),
+    words([inset, d / 2], named('right', `${EDGE_WORDS[spec.edges.right]}, sitter’s right`), true),
+    words([w - inset, d / 2], named('left', `${EDGE_WORDS[spec.edges.left]}, sitter’s left`), true),
   ];
 }
 

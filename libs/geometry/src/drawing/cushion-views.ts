@@ -1,4 +1,5 @@
 import type { CushionSpec } from '../cushions/cushion-spec.ts';
+import { outlineExtent } from '../outlines/outline.ts';
 import { drawingOf, type Drawing, type DrawShape, type PagePoint } from './drawing.ts';
 
 /** Sizes of what is drawn but not measured, millimetres of the real thing. */
@@ -61,8 +62,9 @@ export function cushionFront(spec: CushionSpec): Drawing {
 /** A cushion cut from back to front at a button row. */
 export function cushionSection(spec: CushionSpec): Drawing {
   const { depthMm: d, thicknessMm: t } = spec.finishedMm;
-  const { boardMm } = spec.cut;
-  const inset = (d - boardMm.depthMm) / 2;
+  const board = spec.making?.board;
+  const inset = board ? (d - outlineExtent(board.outline).depthMm) / 2 : 0;
+  const boardMm = board ? BOARD_MM : 0;
   const under = spec.kind === 'seat' ? 'deck' : 'back boards';
   const leader = (y: number, text: string): DrawShape[] => [
     {
@@ -83,10 +85,19 @@ export function cushionSection(spec: CushionSpec): Drawing {
       pen: 'hair',
       fill: 'cloth',
     },
-    { kind: 'polygon', points: rectangle(inset, t, d - inset, t + BOARD_MM), pen: 'cut', fill: 'ply' },
+    ...(board
+      ? [
+          {
+            kind: 'polygon' as const,
+            points: rectangle(inset, t, d - inset, t + boardMm),
+            pen: 'cut' as const,
+            fill: 'ply' as const,
+          },
+        ]
+      : []),
     {
       kind: 'polygon',
-      points: rectangle(-20, t + BOARD_MM, d + 20, t + BOARD_MM + DECK_MM),
+      points: rectangle(-20, t + boardMm, d + 20, t + boardMm + DECK_MM),
       pen: 'cut',
       fill: 'none',
     },
@@ -94,15 +105,15 @@ export function cushionSection(spec: CushionSpec): Drawing {
       kind: 'polyline',
       points: [
         [row, 0],
-        [row, t + BOARD_MM],
+        [row, t + boardMm],
       ],
       pen: 'fine',
       dashed: true,
     })),
     { kind: 'dimension', from: [0, t], to: [0, 0], offsetMm: t / 2, valueMm: t, labelLane: 0 },
     ...leader(t / 2, 'foam'),
-    ...leader(t + BOARD_MM / 2, 'board'),
-    ...leader(t + BOARD_MM + DECK_MM / 2, under),
+    ...(board ? leader(t + boardMm / 2, 'board') : []),
+    ...leader(t + boardMm + DECK_MM / 2, under),
   ];
   return drawingOf(shapes, t);
 }

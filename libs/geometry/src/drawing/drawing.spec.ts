@@ -190,7 +190,7 @@ describe('cushion drawing', () => {
       const drawn = points
         .slice(1)
         .reduce((total, [x, y], i) => total + Math.hypot(x - points[i]![0], y - points[i]![1]), 0);
-      expect(drawn).toBeCloseTo(spec.cut.zip.lengthMm, 6);
+      expect(drawn).toBeCloseTo(spec.making!.closure.lengthMm, 6);
     }
   });
 

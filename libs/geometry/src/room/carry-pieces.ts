@@ -1,3 +1,4 @@
+import { copyCushionChoices, withoutLostCushions } from './cushion-choices.ts';
 import type { Piece, SetDocument } from './document.ts';
 import { freeId, nextMark, shownPiece } from './edit-pieces.ts';
 import { footprint } from './footprint.ts';
@@ -24,16 +25,17 @@ export interface Pasted {
  *
  * @param document - the set
  * @param pieceIds - unknown ids are passed over
- * @returns a document with these pieces and their seating, and nothing else
+ * @returns a document with these pieces, their seating and what was chosen of their cushions, and nothing else
  */
 export function carriedPieces(document: SetDocument, pieceIds: readonly string[]): SetDocument {
   const pieces = namedPieces(document, pieceIds);
   const ids = new Set(pieces.map(({ id }) => id));
-  return {
+  return withoutLostCushions({
     ...emptySetDocument(),
     pieces,
     seating: document.seating.filter(({ pieceId }) => ids.has(pieceId)),
-  };
+    ...(document.cushions && { cushions: document.cushions }),
+  });
 }
 
 /**
@@ -59,6 +61,7 @@ export function pastePieces(document: SetDocument, carried: SetDocument, withPeo
     const at = { ...piece.at, xMm: piece.at.xMm + byMm };
     const copy: Piece = { ...shownPiece(piece), id, mark, locked: false, at };
     set = { ...set, pieces: [...set.pieces, copy] };
+    set = copyCushionChoices(set, piece.id, id, carried.cushions);
   }
   const here = new Set(set.seating.flatMap(({ sitter }) => (sitter.kind === 'cast' ? [sitter.castId] : [])));
   const seats = carried.seating.flatMap((seat) => {

@@ -1,24 +1,8 @@
 import { parametersOf } from '../pieces/parameters.ts';
 import type { Piece, SetDocument } from './document.ts';
+import { cushionDifferences } from './diff-cushions.ts';
+import { compared, type DocumentDifference, type Named } from './document-difference.ts';
 import { isSame, leavesOf } from './leaves.ts';
-
-/** One point at which two versions of a set differ. A value that is absent is `undefined`. */
-export interface DocumentDifference {
-  /** Stable while the three versions stay the same. */
-  id: string;
-  kind: 'parameter' | 'piece' | 'seating' | 'asked' | 'known-difference' | 'group' | 'view' | 'dimension';
-  pieceId?: string;
-  mark?: string;
-  /** Path of the parameter in its piece. */
-  key?: string;
-  label: string;
-  base: unknown;
-  mine: unknown;
-  theirs: unknown;
-  changedBy: 'mine' | 'theirs' | 'both';
-  /** True when both sides changed it to different values, so that somebody must choose. */
-  conflict: boolean;
-}
 
 const LABELS: Record<string, string> = {
   at: 'Position',
@@ -34,6 +18,7 @@ const LABELS: Record<string, string> = {
   'seatCushion.foam': 'Seat foam',
   'backCushion.foam': 'Back foam',
   'upholstery.buttons': 'Buttons',
+  'upholstery.joints': 'Joints of the cushions',
   lumbar: 'Back curve',
 };
 
@@ -83,25 +68,8 @@ export function diffDocuments(
       ({ id, name }) => ({ id: `view:${id}`, kind: 'view', key: id, label: `View “${name}”` }),
     ),
     ...dimensionDifferences(base, mine, theirs),
+    ...cushionDifferences(base, mine, theirs),
   ];
-}
-
-type Named = Omit<DocumentDifference, 'base' | 'mine' | 'theirs' | 'changedBy' | 'conflict'>;
-
-/** The difference between two values, or none; `known` is false when the common version is lost. */
-function compared(
-  named: Named,
-  values: { base: unknown; mine: unknown; theirs: unknown },
-  known: boolean,
-): DocumentDifference[] {
-  if (isSame(values.mine, values.theirs)) return [];
-  const changedBy =
-    known && isSame(values.base, values.theirs)
-      ? 'mine'
-      : known && isSame(values.base, values.mine)
-        ? 'theirs'
-        : 'both';
-  return [{ ...named, ...values, changedBy, conflict: changedBy === 'both' }];
 }
 
 function pieceDifferences(

@@ -1,5 +1,8 @@
 import { TAPE_MEASURE_KEYS } from '@settlewright/anthropometry';
 import { z } from 'zod';
+import { cushionChoiceSchema } from '../cushions/cushion-choice.ts';
+import { CUSHION_KEY } from '../cushions/cushion-key.ts';
+import { runJointsSchema } from '../cushions/run-joints.ts';
 import { dimensionSchema, MAX_DIMENSIONS } from '../measuring/dimension.ts';
 import { MAX_VIEWS, namedViewSchema } from '../views/named-view.ts';
 import { postureChoiceSchema } from './posture-choice.ts';
@@ -90,6 +93,8 @@ const bench = z.strictObject({
   upholstery: z.strictObject({
     /** A run longer than this is split near equal parts, on board joints where one is close. */
     longestCushionMm: length(300, 3000),
+    /** Joints of the runs that somebody chose. */
+    joints: z.strictObject({ seat: runJointsSchema.optional(), back: runJointsSchema.optional() }).optional(),
     buttons: z.strictObject({
       rows: z.number().int().min(0).max(8),
       everyBoards: z.number().int().min(1).max(40),
@@ -186,6 +191,8 @@ const sitterRef = z.discriminatedUnion('kind', [
     measure: z.enum(['stature', ...TAPE_MEASURE_KEYS]),
     percentile: z.number().gt(0).lt(100),
   }),
+  /** A child of a size of school furniture, drawn for scale. */
+  z.strictObject({ kind: z.literal('child'), sizeMark: z.number().int().min(1).max(6) }),
 ]);
 
 const spot = z.strictObject({ xMm: length(-50000, 50000), zMm: length(-50000, 50000) });
@@ -250,6 +257,8 @@ export const setDocumentSchema = z.strictObject({
   views: z.array(namedViewSchema).max(MAX_VIEWS).optional(),
   /** Dimension lines that stay with the set, between pieces or from a piece to whoever sits at a place. */
   dimensions: z.array(dimensionSchema).max(MAX_DIMENSIONS).optional(),
+  /** What was chosen of single cushions, by their keys. One that its piece does not have now waits for it. */
+  cushions: z.record(z.string().regex(CUSHION_KEY), cushionChoiceSchema).optional(),
 });
 
 export type SetDocument = z.infer<typeof setDocumentSchema>;

@@ -2,6 +2,7 @@ import { definitionOf, kindTitle } from '../pieces/kinds.ts';
 import { normalTurnDeg, toRoom } from '../parts/placement.ts';
 import { footprint } from './footprint.ts';
 import type { Piece, PieceKind, SetDocument } from './document.ts';
+import { copyCushionChoices, withoutLostCushions } from './cushion-choices.ts';
 import { withoutLostDimensions } from '../measuring/edit-dimensions.ts';
 import { withoutLostMembers } from './groups.ts';
 import { withoutLostSeats } from './seating.ts';
@@ -81,8 +82,16 @@ export function addPiece(
 export function removePiece(document: SetDocument, pieceId: string): SetDocument {
   const pieces = document.pieces.filter((piece) => piece.id !== pieceId || piece.locked);
   if (pieces.length === document.pieces.length) return document;
-  return withoutLostDimensions(withoutLostMembers(withoutLostSeats({ ...document, pieces })));
+  return withoutLostParts({ ...document, pieces });
 }
+
+/**
+ * A set without what hung on pieces that are no longer there: seats, members of groups, dimension lines, choices of cushions.
+ *
+ * @param document - the set
+ */
+export const withoutLostParts = (document: SetDocument): SetDocument =>
+  withoutLostCushions(withoutLostDimensions(withoutLostMembers(withoutLostSeats(document))));
 
 /**
  * Adds a copy of a piece beside it, with the next mark and nobody seated.
@@ -104,10 +113,8 @@ export function duplicatePiece(
   const { x0, x1 } = footprint(piece);
   const [xMm, , zMm] = toRoom(piece.at, [x1 - x0 + DUPLICATE_GAP_MM, 0, 0]);
   const copy = { ...shownPiece(piece), id: copyId, mark, locked: false, at: { ...piece.at, xMm, zMm } };
-  return {
-    document: withoutLostSeats({ ...document, pieces: [...document.pieces, copy] }),
-    pieceId: copyId,
-  };
+  const copied = copyCushionChoices({ ...document, pieces: [...document.pieces, copy] }, piece.id, copyId);
+  return { document: withoutLostSeats(copied), pieceId: copyId };
 }
 
 /**

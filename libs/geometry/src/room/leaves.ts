@@ -1,5 +1,5 @@
 /** Values that only make sense together and are chosen as one. */
-const WHOLE = new Set(['at', 'places', 'base', 'foam', 'buttons', 'lumbar', 'leaves']);
+const WHOLE = new Set(['at', 'places', 'base', 'foam', 'buttons', 'lumbar', 'leaves', 'joints']);
 
 /**
  * The single values of a piece, by path; a position, a base, a foam and the like count as one value.

@@ -1,15 +1,16 @@
 import { fail, ok, type Result } from '../units/result.ts';
-import { diffDocuments, type DocumentDifference } from './diff-documents.ts';
 import type { PinnedDimension } from '../measuring/dimension.ts';
-import { pinDimension, withDimensions, withoutLostDimensions } from '../measuring/edit-dimensions.ts';
+import { pinDimension, withDimensions } from '../measuring/edit-dimensions.ts';
+import { chooseCushion, copyCushionChoices } from './cushion-choices.ts';
+import { diffDocuments } from './diff-documents.ts';
 import type { Piece, PieceGroup, SetDocument, SitterRef } from './document.ts';
 import type { NamedView } from '../views/named-view.ts';
-import { freeId, nextMark } from './edit-pieces.ts';
-import { withoutLostMembers } from './groups.ts';
+import type { DocumentDifference } from './document-difference.ts';
+import { freeId, nextMark, withoutLostParts } from './edit-pieces.ts';
 import { withPath } from './leaves.ts';
 import { readSetDocument, type DocumentFieldError } from './read-document.ts';
 import type { PostureChoice } from './posture-choice.ts';
-import { choosePosture, withoutLostSeats } from './seating.ts';
+import { choosePosture } from './seating.ts';
 
 /** Somebody who has no place in a merged set. */
 export interface Unseated {
@@ -63,7 +64,7 @@ export function mergeDocuments(
     });
   }
   const taken = differences.filter(({ id, changedBy }) => (choices[id] ?? changedBy) !== 'theirs');
-  const applied = taken.reduce((merged, difference) => withMine(merged, difference), theirs);
+  const applied = taken.reduce((merged, difference) => withMine(merged, difference, mine), theirs);
   const { document, remarked } = withFreeMarks(applied, mine, theirs);
   const { document: seated, unseated } = withEveryoneOnce(document, mine);
   const read = readSetDocument(seated);
@@ -75,8 +76,8 @@ export function mergeDocuments(
 }
 
 /** Takes the value of my side at one difference. */
-function withMine(merged: SetDocument, difference: DocumentDifference): SetDocument {
-  const { kind, pieceId = '', key = '', mine } = difference;
+function withMine(merged: SetDocument, difference: DocumentDifference, own: SetDocument): SetDocument {
+  const { id, kind, pieceId = '', key = '', mine } = difference;
   switch (kind) {
     case 'parameter': {
       const pieces = merged.pieces.map((piece) =>
@@ -85,9 +86,9 @@ function withMine(merged: SetDocument, difference: DocumentDifference): SetDocum
       return { ...merged, pieces };
     }
     case 'piece':
-      return withMyPiece(merged, pieceId, difference);
+      return withMyPiece(merged, pieceId, difference, own.cushions);
     case 'seating': {
-      const place = Number(difference.id.slice(difference.id.lastIndexOf(':') + 1));
+      const place = Number(id.slice(id.lastIndexOf(':') + 1));
       return key === 'posture'
         ? choosePosture(merged, pieceId, place, (mine as PostureChoice | undefined) ?? null)
         : withMySitter(merged, pieceId, place, mine as SitterRef | undefined);
@@ -105,6 +106,8 @@ function withMine(merged: SetDocument, difference: DocumentDifference): SetDocum
       return withMyView(merged, key, mine as NamedView | undefined);
     case 'dimension':
       return withMyDimension(merged, difference);
+    case 'cushion':
+      return chooseCushion(merged, id.slice(id.indexOf(':') + 1, id.lastIndexOf(':')), { [key]: mine });
   }
 }
 
@@ -155,15 +158,21 @@ function withMySitter(
   return { ...merged, seating: sitter === undefined ? others : [...others, { ...seat, sitter }] };
 }
 
-function withMyPiece(merged: SetDocument, pieceId: string, difference: DocumentDifference): SetDocument {
+function withMyPiece(
+  merged: SetDocument,
+  pieceId: string,
+  difference: DocumentDifference,
+  cushions: SetDocument['cushions'],
+): SetDocument {
   const piece = difference.mine as Piece | undefined;
   const bothAdded = difference.changedBy === 'both' && !difference.conflict;
   if (bothAdded && piece !== undefined) {
     const copy = { ...piece, id: freeId(merged, piece.mark) };
-    return { ...merged, pieces: [...merged.pieces, copy] };
+    return copyCushionChoices({ ...merged, pieces: [...merged.pieces, copy] }, pieceId, copy.id, cushions);
   }
   const others = merged.pieces.filter(({ id }) => id !== pieceId);
-  return { ...merged, pieces: piece === undefined ? others : [...others, piece] };
+  if (piece === undefined) return { ...merged, pieces: others };
+  return copyCushionChoices({ ...merged, pieces: [...others, piece] }, pieceId, pieceId, cushions);
 }
 
 /** Gives the next free mark to pieces of mine whose mark the other side has given as well. */
@@ -199,6 +208,6 @@ function withEveryoneOnce(merged: SetDocument, mine: SetDocument): Pick<Merge, '
     seen.add(sitter.castId);
     return !again;
   });
-  const document = withoutLostDimensions(withoutLostMembers(withoutLostSeats({ ...merged, seating: once })));
+  const document = withoutLostParts({ ...merged, seating: once });
   return { document, unseated: merged.seating.filter((seat) => !document.seating.includes(seat)) };
 }

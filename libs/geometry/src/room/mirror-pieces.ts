@@ -1,7 +1,10 @@
+import type { RunJoints } from '../cushions/run-joints.ts';
 import { normalTurnDeg, toRoom } from '../parts/placement.ts';
+import { benchLayout } from '../pieces/bench-layout.ts';
 import { placeFrames } from '../pieces/place-frames.ts';
 import { degrees, radians } from '../units/angle.ts';
-import type { Piece, SetDocument } from './document.ts';
+import { mirrorCushionChoices } from './cushion-choices.ts';
+import type { Piece, PieceOf, SetDocument } from './document.ts';
 import { duplicatePiece } from './edit-pieces.ts';
 import { footprint } from './footprint.ts';
 import { namedPieces } from './named-pieces.ts';
@@ -83,7 +86,7 @@ export function mirrorPieces(
     return piece === undefined ? seat : mirroredSeat(seat, placeFrames(piece, document).length);
   });
   const pieces = document.pieces.map((piece) => (mirrored.has(piece.id) ? mirrorOf(piece, plane) : piece));
-  return withoutLostSeats({ ...document, pieces, seating });
+  return withoutLostSeats(mirrorCushionChoices({ ...document, pieces, seating }, new Set(mirrored.keys())));
 }
 
 /**
@@ -108,7 +111,7 @@ export function mirrorCopies(
     );
     return { ...one.document, pieces };
   }, document);
-  return { document: withoutLostSeats(copied), pieceIds: copies };
+  return { document: withoutLostSeats(mirrorCushionChoices(copied, new Set(copies))), pieceIds: copies };
 }
 
 /** Every kind is the same on both sides of its own middle, but for what `handed` swaps. */
@@ -133,11 +136,32 @@ function mirrorOf<P extends Piece>(piece: P, plane: MirrorPlane): P {
 function handed<P extends Piece>(piece: P): P {
   if (piece.kind === 'bench') {
     const { left, right } = piece.ends;
-    return { ...piece, ends: { left: right, right: left } };
+    return { ...piece, ends: { left: right, right: left }, upholstery: mirroredJoints(piece) };
   }
   if (piece.kind !== 'table' || piece.leaves === undefined) return piece;
   const { left, right, ...sides } = piece.leaves;
   return { ...piece, leaves: { ...sides, ...(right && { left: right }), ...(left && { right: left }) } };
+}
+
+/** Chosen joints are measured from the other end of the run, which is as long as before. */
+function mirroredJoints(bench: PieceOf<'bench'>): PieceOf<'bench'>['upholstery'] {
+  const { joints } = bench.upholstery;
+  if (!joints) return bench.upholstery;
+  const { cushionLeftMm, cushionRightMm } = benchLayout(bench);
+  const whole = cushionRightMm - cushionLeftMm;
+  const over = (one: RunJoints): RunJoints =>
+    one.by === 'positions'
+      ? {
+          ...one,
+          atMm: one.atMm
+            .filter((at) => at < whole - 1)
+            .map((at) => tidy(whole - at))
+            .reverse(),
+        }
+      : one;
+  const { seat, back } = joints;
+  const mirrored = { ...(seat && { seat: over(seat) }), ...(back && { back: over(back) }) };
+  return { ...bench.upholstery, joints: mirrored };
 }
 
 function mirroredSeat({ posture, ...seat }: Seat, places: number): Seat {

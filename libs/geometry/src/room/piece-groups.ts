@@ -1,11 +1,8 @@
 import { normalTurnDeg, toRoom } from '../parts/placement.ts';
 import type { Piece, SetDocument } from './document.ts';
-import { duplicatePiece, movePiece } from './edit-pieces.ts';
+import { duplicatePiece, movePiece, withoutLostParts } from './edit-pieces.ts';
 import { footprint } from './footprint.ts';
-import { withoutLostDimensions } from '../measuring/edit-dimensions.ts';
-import { withoutLostMembers } from './groups.ts';
 import { namedPieces } from './named-pieces.ts';
-import { withoutLostSeats } from './seating.ts';
 
 const COPY_GAP_MM = 50;
 
@@ -66,7 +63,7 @@ export function turnPieces(document: SetDocument, pieceIds: readonly string[], b
 export function removePieces(document: SetDocument, pieceIds: readonly string[]): SetDocument {
   const pieces = document.pieces.filter((piece) => piece.locked || !pieceIds.includes(piece.id));
   if (pieces.length === document.pieces.length) return document;
-  return withoutLostDimensions(withoutLostMembers(withoutLostSeats({ ...document, pieces })));
+  return withoutLostParts({ ...document, pieces });
 }
 
 /**

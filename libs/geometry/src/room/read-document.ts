@@ -1,6 +1,7 @@
 import { fail, ok, type Result } from '../units/result.ts';
 import { SCHEMA_VERSION, setDocumentSchema, type SetDocument } from './document.ts';
 import { leafFault } from '../pieces/table-leaves.ts';
+import { mayHaveCushion } from './cushion-choices.ts';
 import { placeExists } from './seating.ts';
 import { upgraded } from './upgrades.ts';
 
@@ -125,6 +126,11 @@ function meaningErrors(document: SetDocument): DocumentFieldError[] {
       errors.push({ path: `dimensions.${i}.ends`, code: 'no-such-piece', message });
     }
   });
+  for (const key of Object.keys(document.cushions ?? {})) {
+    if (mayHaveCushion(document, key)) continue;
+    const message = `There is no piece of the set that has a cushion “${key}”`;
+    errors.push({ path: `cushions.${key}`, code: 'no-such-cushion', message });
+  }
   if (errors.length > 0) return errors;
   document.seating.forEach((seat, i) => {
     const where = `${seat.pieceId}:${seat.place}`;

@@ -70,7 +70,19 @@ export class ComparedVersionDto extends VersionStateDto {
 }
 
 export class DocumentChangeDto {
-  @ApiProperty({ enum: ['parameter', 'piece', 'seating', 'asked', 'known-difference', 'group', 'view'] })
+  @ApiProperty({
+    enum: [
+      'parameter',
+      'piece',
+      'seating',
+      'asked',
+      'known-difference',
+      'group',
+      'view',
+      'dimension',
+      'cushion',
+    ],
+  })
   kind: DocumentDifference['kind'];
   @ApiPropertyOptional()
   pieceId?: string;

@@ -1,5 +1,13 @@
-import type { CushionDatum, CushionSpec, EdgeMeets } from '@settlewright/geometry';
+import type { CushionDatum, CushionEdge, CushionSpec, EdgeMeets, HoldDown } from '@settlewright/geometry';
+import { CUSHION_EDGES, HOLD_DOWNS } from '@settlewright/geometry';
 import { ApiProperty, ApiPropertyOptional } from '@nestjs/swagger';
+import {
+  CushionMakeDto,
+  CushionPanelsDto,
+  CushionTuftingDto,
+  CushionWarningDto,
+  OutlineCornerDto,
+} from './cushion-make.dto';
 
 const EDGES = [
   'wall',
@@ -24,79 +32,6 @@ export class CushionSizeDto {
   depthMm: number;
   @ApiProperty()
   thicknessMm: number;
-}
-
-export class CushionFaceDto {
-  @ApiProperty()
-  widthMm: number;
-  @ApiProperty()
-  depthMm: number;
-}
-
-export class CushionPlatesDto extends CushionFaceDto {
-  @ApiProperty({ type: Number, enum: [2] })
-  count: 2;
-}
-
-export class CushionZipDto {
-  @ApiProperty()
-  edgeMm: number;
-  @ApiProperty()
-  wrapMm: number;
-  @ApiProperty()
-  lengthMm: number;
-}
-
-export class CushionZipPanelDto {
-  @ApiProperty({ type: Number, enum: [2] })
-  count: 2;
-  @ApiProperty()
-  halfWidthMm: number;
-  @ApiProperty()
-  lengthMm: number;
-}
-
-export class CushionBoxingDto {
-  @ApiProperty()
-  finishedLengthMm: number;
-  @ApiProperty()
-  cutLengthMm: number;
-  @ApiProperty()
-  cutHeightMm: number;
-}
-
-export class CushionWeltDto {
-  @ApiProperty({ type: Number, enum: [2] })
-  seams: 2;
-  @ApiProperty()
-  alongSeamsMm: number;
-  @ApiProperty()
-  joinsMm: number;
-  @ApiProperty()
-  lengthMm: number;
-}
-
-export class CushionCutDto {
-  @ApiProperty({ type: CushionSizeDto })
-  foamMm: CushionSizeDto;
-  @ApiProperty()
-  foamVolumeM3: number;
-  @ApiProperty()
-  foamMassKg: number;
-  @ApiProperty({ type: CushionFaceDto })
-  boardMm: CushionFaceDto;
-  @ApiProperty({ type: CushionPlatesDto })
-  plates: CushionPlatesDto;
-  @ApiProperty()
-  perimeterMm: number;
-  @ApiProperty({ type: CushionZipDto })
-  zip: CushionZipDto;
-  @ApiProperty({ type: CushionZipPanelDto })
-  zipPanel: CushionZipPanelDto;
-  @ApiProperty({ type: CushionBoxingDto })
-  boxing: CushionBoxingDto;
-  @ApiProperty({ type: CushionWeltDto })
-  welt: CushionWeltDto;
 }
 
 export class CushionFoamDto {
@@ -148,6 +83,15 @@ export class ButtonColumnDto {
   offJointMm: number;
 }
 
+export class RowsOverSeatDto {
+  @ApiProperty({ type: [Number] })
+  overMm: number[];
+  @ApiProperty()
+  sinkMm: number;
+  @ApiProperty()
+  goesDown: boolean;
+}
+
 export class ButtonTableDto {
   @ApiProperty({ type: [ButtonColumnDto] })
   columns: ButtonColumnDto[];
@@ -155,8 +99,12 @@ export class ButtonTableDto {
   rowsMm: number[];
   @ApiProperty()
   count: number;
-  @ApiProperty({ enum: ['joints', 'board-centres'] })
-  alignedTo: 'joints' | 'board-centres';
+  @ApiProperty({ enum: ['grid', 'staggered'] })
+  pattern: 'grid' | 'staggered';
+  @ApiProperty({ enum: ['joints', 'board-centres', 'field'] })
+  alignedTo: 'joints' | 'board-centres' | 'field';
+  @ApiPropertyOptional({ type: RowsOverSeatDto })
+  rowsOverSeat?: RowsOverSeatDto;
 }
 
 export class CushionDatumDto {
@@ -194,16 +142,30 @@ export class CushionDto implements CushionSpec {
   gapsMm: CushionGapsDto;
   @ApiProperty({ type: CushionSizeDto, description: 'seam to seam' })
   finishedMm: CushionSizeDto;
-  @ApiProperty({ type: CushionCutDto })
-  cut: CushionCutDto;
-  @ApiProperty({ enum: ['back', 'bottom'] })
-  zipEdge: 'back' | 'bottom';
+  @ApiProperty({ type: CushionMakeDto })
+  make: CushionMakeDto;
+  @ApiProperty({ type: [OutlineCornerDto] })
+  outline: OutlineCornerDto[];
+  @ApiPropertyOptional({ type: CushionPanelsDto, description: 'absent where it cannot be made as asked' })
+  making?: CushionPanelsDto;
+  @ApiProperty({ type: [String] })
+  faults: string[];
+  @ApiProperty({ type: [CushionWarningDto] })
+  warnings: CushionSpec['warnings'];
   @ApiProperty({ type: CushionFoamDto })
   foam: CushionFoamDto;
+  @ApiProperty({ type: CushionTuftingDto })
+  tufting: CushionTuftingDto;
   @ApiProperty({ type: ButtonTableDto })
   buttons: ButtonTableDto;
   @ApiProperty({ type: [Number] })
   boardLinesMm: number[];
   @ApiProperty({ type: CushionDatumDto })
   datum: CushionDatumDto;
+  @ApiProperty({ enum: CUSHION_EDGES, isArray: true })
+  cameraSides: CushionEdge[];
+  @ApiPropertyOptional({ enum: HOLD_DOWNS })
+  holdDown?: HoldDown;
+  @ApiPropertyOptional()
+  notes?: string;
 }

@@ -40,3 +40,18 @@ export const CONSTRUCTION_WORDS: Record<Construction, string> = {
   bullnose: 'bullnose front',
   'plywood-backed': 'on plywood, pulled and stapled',
 };
+
+/** Closures in the words of the sheet. */
+export const CLOSURE_WORDS: Record<CushionMake['closure'], string> = {
+  zip: 'zip',
+  'hook-and-loop': 'hook-and-loop',
+  'hand-sewn': 'sewn shut by hand',
+  stapled: 'stapled under the board',
+};
+
+/** Welt in the words of the sheet. */
+export const WELT_WORDS: Record<CushionMake['welt'], string> = {
+  none: 'no welt',
+  straight: 'welt cut straight',
+  bias: 'welt cut on the bias',
+};

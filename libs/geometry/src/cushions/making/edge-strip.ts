@@ -1,8 +1,10 @@
 import {
+  outlinePoints,
   outlineStretches,
   stretchLength,
   type OutlineCorner,
   type OutlineStretch,
+  type Point2,
 } from '../../outlines/outline.ts';
 
 /** How the strip round a plan divides into closure and boxing. */
@@ -58,4 +60,38 @@ function firstOf(stretches: readonly OutlineStretch[], edge: string): number {
   });
   const widest = Math.max(...gaps);
   return Math.max(0, gaps.indexOf(widest));
+}
+
+/**
+ * The way of a closure along its edge and round both ends.
+ *
+ * @param corners - plan, seam to seam
+ * @param edge - with the closure
+ * @param wrapMm - round each end, as `edgeStrip` gives it
+ * @returns points anticlockwise from one end of the closure to the other; arcs as chords
+ */
+export function closurePath(corners: readonly OutlineCorner[], edge: string, wrapMm: number): Point2[] {
+  const stretches = outlineStretches(corners);
+  const { closure } = edgeStrip(corners, edge, wrapMm);
+  const points = outlinePoints(corners, 0.5);
+  const start = stretches[firstOf(stretches, edge)]!.from;
+  const first = points.findIndex(([x, y]) => Math.hypot(x - start[0], y - start[1]) < 1e-6);
+  const way = [...points.slice(first), ...points.slice(0, first)];
+  const forward = along(way, closure.edgeMm + wrapMm);
+  const backward = along([way[0]!, ...way.slice(1).reverse()], wrapMm);
+  return [...backward.slice(1).reverse(), ...forward];
+}
+
+/** The first so many millimetres of a closed way. */
+function along(way: readonly Point2[], lengthMm: number): Point2[] {
+  const taken: Point2[] = [way[0]!];
+  let left = lengthMm;
+  for (let i = 0; i < way.length && left > 1e-6; i += 1) {
+    const [from, to] = [way[i]!, way[(i + 1) % way.length]!];
+    const whole = Math.hypot(to[0] - from[0], to[1] - from[1]);
+    const part = Math.min(1, left / whole);
+    taken.push([from[0] + part * (to[0] - from[0]), from[1] + part * (to[1] - from[1])]);
+    left -= whole;
+  }
+  return taken;
 }

@@ -1,11 +1,14 @@
 import {
   curveWords,
   cushionDrawing,
+  cushionWarningWords,
   groupCushions,
+  makeWords,
+  outlineExtent,
   type CushionGroup,
   type CushionSpec,
 } from '@settlewright/geometry';
-import { useMemo, type ReactNode } from 'react';
+import { Fragment, useMemo, type ReactNode } from 'react';
 import { MarkTag } from '@/components/mark-tag.tsx';
 import { Measure } from '@/components/measure.tsx';
 import { useFormat } from '@/lib/format.ts';
@@ -17,6 +20,12 @@ const HAND_WORDS: Record<CushionSpec['hand'], string> = {
   left: 'left hand',
   right: 'right hand',
   either: 'either hand',
+};
+
+const ALIGNED_WORDS: Record<CushionSpec['buttons']['alignedTo'], string> = {
+  joints: 'on board joints',
+  'board-centres': 'on board centres',
+  field: 'in a field of tufts',
 };
 
 /** Three sizes in a row, the unit once at the end. */
@@ -45,7 +54,9 @@ function Row({ name, children }: { name: string; children: ReactNode }) {
 
 function Facts({ spec, words }: { spec: CushionSpec; words: OrderSpec }) {
   const format = useFormat();
-  const { cut, foam, buttons } = spec;
+  const { making, make, foam, buttons } = spec;
+  const sawn = making && outlineExtent(making.foam.outline);
+  const closed = making?.closure;
   const show = (mm: number) => <Measure text={format.length(mm)} />;
   return (
     <dl className="grid content-start gap-x-8 border-t border-rule @min-[36rem]:@max-[54rem]:grid-cols-2">
@@ -53,27 +64,54 @@ function Facts({ spec, words }: { spec: CushionSpec; words: OrderSpec }) {
         {show(spec.placeMm.widthMm)} × {show(spec.placeMm.depthMm)}, wood to wood
       </Row>
       {spec.curve && <Row name="Curve">{curveWords(spec.curve, format.style)}</Row>}
+      <Row name="Made">
+        {spec.faults.length > 0 ? `Not as asked: ${spec.faults.join('; ')}` : makeWords(make, spec.kind)}
+      </Row>
       <Row name="Foam">
-        {show(cut.foamMm.widthMm)} × {show(cut.foamMm.depthMm)} × {show(cut.foamMm.thicknessMm)},{' '}
+        {making && sawn && (
+          <>
+            {show(sawn.widthMm)} × {show(sawn.depthMm)} × {show(making.foam.thicknessMm)},{' '}
+          </>
+        )}
         {foamText(foam, format.style)}
         {words.foam !== '' && `; ${words.foam}`}
       </Row>
-      <Row name="Cloth cut">
-        {cut.plates.count} plates {show(cut.plates.widthMm)} × {show(cut.plates.depthMm)}, boxing{' '}
-        {show(cut.boxing.cutHeightMm)} × {show(cut.boxing.cutLengthMm)}
-      </Row>
+      {making && (
+        <Row name="Cloth cut">
+          {making.panels.map(({ name, count, cut }, i) => {
+            const { widthMm, depthMm } = outlineExtent(cut);
+            return (
+              <Fragment key={name}>
+                {i > 0 && ', '}
+                {count} {name} {show(widthMm)} × {show(depthMm)}
+              </Fragment>
+            );
+          })}
+        </Row>
+      )}
       {words.cover !== '' && <Row name="Cover">{words.cover}</Row>}
-      <Row name="Welt">
-        {show(cut.welt.lengthMm)} ({runText(cut.welt.lengthMm, format.style)}) for {cut.welt.seams} seams
-        {words.welt !== '' && `; ${words.welt}`}
-      </Row>
-      <Row name="Closure">
-        Zip {show(cut.zip.lengthMm)} in the {spec.zipEdge} edge, {show(cut.zip.wrapMm)} round each corner
-        {words.closure !== '' && `; ${words.closure}`}
-      </Row>
+      {making && making.welt.lengthMm > 0 && (
+        <Row name="Welt">
+          {show(making.welt.lengthMm)} ({runText(making.welt.lengthMm, format.style)}) for {making.welt.seams}{' '}
+          {making.welt.seams === 1 ? 'seam' : 'seams'}
+          {words.welt !== '' && `; ${words.welt}`}
+        </Row>
+      )}
+      {closed && closed.edgeMm > 0 && (
+        <Row name="Closure">
+          {show(closed.lengthMm)}
+          {closed.wrapMm > 0 && <>, {show(closed.wrapMm)} round each corner</>}
+          {words.closure !== '' && `; ${words.closure}`}
+        </Row>
+      )}
+      {spec.warnings.length > 0 && (
+        <Row name="Look at">
+          {spec.warnings.map((warning) => cushionWarningWords(warning, format.style)).join(' ')}
+        </Row>
+      )}
       {buttons.count > 0 && (
         <Row name="Buttons">
-          {buttons.count}, on {buttons.alignedTo === 'joints' ? 'board joints' : 'board centres'}
+          {buttons.count}, {ALIGNED_WORDS[buttons.alignedTo]}
           {words.buttons !== '' && `; ${words.buttons}`}
         </Row>
       )}

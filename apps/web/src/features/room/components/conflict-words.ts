@@ -1,9 +1,12 @@
 import type { FitSheet, RuleBook, VerdictOutcome } from '@settlewright/anthropometry';
 import {
+  cushionChoiceWords,
   formatLength,
   LEAF_WORDS,
   lensWords,
   parametersOf,
+  runJointsWords,
+  type CushionChoice,
   type DocumentDifference,
   type LengthStyle,
   type NamedView,
@@ -54,11 +57,20 @@ function sayLeaves(leaves: TableLeaves, style: LengthStyle): string {
   return joinWords(each);
 }
 
+const sayJoints = (value: unknown, style: LengthStyle): string =>
+  runJointsWords(value as NonNullable<PieceOf<'bench'>['upholstery']['joints']>, style);
+
+function sayChosen({ id, key = '' }: DocumentDifference, value: unknown, style: LengthStyle): string {
+  const field = key as keyof CushionChoice;
+  return cushionChoiceWords({ [field]: value }, field, id.includes('/back-') ? 'back' : 'seat', style) ?? '';
+}
+
 /** One side of a difference as a person reads it. */
 export function sayValue(difference: DocumentDifference, side: Side | 'base', words: WordsOf): string {
   const { kind, key = '', pieceId } = difference;
   const value = difference[side];
   if (value === undefined || value === null) {
+    if (kind === 'cushion') return 'as usual';
     if (kind !== 'seating') return 'none';
     return key === 'posture' ? 'as the place suggests' : 'nobody';
   }
@@ -70,6 +82,7 @@ export function sayValue(difference: DocumentDifference, side: Side | 'base', wo
     return joinWords(pieces.filter(({ id }) => pieceIds.includes(id)).map(({ mark }) => mark));
   }
   if (kind === 'dimension') return 'pinned';
+  if (kind === 'cushion') return sayChosen(difference, value, words.style);
   if (key === 'leaves') return sayLeaves(value, words.style);
   if (kind === 'view') {
     const { name, camera } = value as NamedView;
@@ -79,6 +92,7 @@ export function sayValue(difference: DocumentDifference, side: Side | 'base', wo
   }
   if (kind === 'seating' && isSitter(value)) return sitterName(value, words.cast);
   if (key === 'at' && typeof value === 'object') return 'moved';
+  if (key === 'upholstery.joints') return sayJoints(value, words.style);
   const piece = words.documents[side].pieces.find((candidate) => candidate.id === pieceId);
   const said = SAID_AS[key]?.key ?? key;
   const parameter = piece && parametersOf(piece).find((candidate) => candidate.key === said);
