@@ -7,16 +7,27 @@ import { UsersModule } from '../users/users.module';
 import { WorkshopsModule } from '../workshops/workshops.module';
 import { CushionOrder } from './entities/cushion-order.entity';
 import { HeldPapers } from './held-papers.service';
+import { InspectionsService } from './inspections/inspections.service';
 import { IssuedSets } from './issued-sets.service';
+import { LinkLifeController } from './life/link-life.controller';
+import { OrderLifeController } from './life/order-life.controller';
+import { OrderLife } from './life/order-life.service';
+import { LinkLimits } from './link-limits';
 import { LinkController } from './link.controller';
 import { LinkService } from './link.service';
+import { OrderActs } from './order-acts.service';
 import { OrderCorrespondence } from './order-correspondence.service';
+import { OrderLetters } from './order-letters.service';
+import { OrderMarks } from './order-marks.service';
 import { OrderPaper } from './order-paper.service';
 import { OrderProgress } from './order-progress.service';
 import { OrderTexts } from './order-texts.service';
 import { OrderViews } from './order-views.service';
 import { OrdersController } from './orders.controller';
 import { OrdersService } from './orders.service';
+import { QuestionsService } from './questions/questions.service';
+import { QuotesService } from './quotes/quotes.service';
+import { SentCushions } from './sent-cushions.service';
 
 @Module({
   imports: [
@@ -27,7 +38,7 @@ import { OrdersService } from './orders.service';
     UsersModule,
     WorkshopsModule,
   ],
-  controllers: [OrdersController, LinkController],
+  controllers: [OrdersController, OrderLifeController, LinkController, LinkLifeController],
   providers: [
     IssuedSets,
     OrdersService,
@@ -38,6 +49,15 @@ import { OrdersService } from './orders.service';
     LinkService,
     OrderTexts,
     HeldPapers,
+    SentCushions,
+    LinkLimits,
+    OrderLetters,
+    OrderActs,
+    OrderMarks,
+    OrderLife,
+    QuotesService,
+    QuestionsService,
+    InspectionsService,
   ],
   exports: [OrdersService, OrderCorrespondence, LinkService, OrderTexts, HeldPapers],
 })

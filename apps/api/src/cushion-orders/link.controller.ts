@@ -12,9 +12,9 @@ import {
 import { ApiOkResponse, ApiProduces, ApiTags } from '@nestjs/swagger';
 import type { Request } from 'express';
 import { Access } from '../common/access.decorator';
-import { RateLimits } from '../rate-limits/rate-limits.service';
 import { PublicOrderDto } from './dto/public-order.dto';
 import { AcknowledgeDto, WriteMessageDto } from './dto/write-order.dto';
+import { LinkLimits } from './link-limits';
 import { LinkService } from './link.service';
 import { OrderPaper } from './order-paper.service';
 import { OrderViews } from './order-views.service';
@@ -31,13 +31,13 @@ export class LinkController {
     private readonly links: LinkService,
     private readonly views: OrderViews,
     private readonly paper: OrderPaper,
-    private readonly limits: RateLimits,
+    private readonly limits: LinkLimits,
   ) {}
 
   @Get()
   @ApiOkResponse({ type: PublicOrderDto })
   async read(@Param('token') token: string, @Req() request: Request): Promise<PublicOrderDto> {
-    await this.limits.take('link-ip', request.ip ?? '');
+    await this.limits.reading(request);
     return this.views.public(await this.links.open(token));
   }
 
@@ -45,7 +45,7 @@ export class LinkController {
   @ApiProduces('application/pdf')
   @ApiOkResponse({ schema: { type: 'string', format: 'binary' } })
   async specPdf(@Param('token') token: string, @Req() request: Request): Promise<StreamableFile> {
-    await this.limits.take('link-ip', request.ip ?? '');
+    await this.limits.reading(request);
     const { order, sent } = await this.links.open(token);
     return pdfFile(await this.paper.pack(order, sent), order.number, sent.revisionLetter);
   }
@@ -58,7 +58,7 @@ export class LinkController {
     @Req() request: Request,
     @Body() body: AcknowledgeDto,
   ): Promise<PublicOrderDto> {
-    await this.limitAnswers(token, request);
+    await this.limits.answering(token, request);
     await this.links.acknowledge(token, body.name, body.sentAt);
     return this.views.public(await this.links.open(token));
   }
@@ -71,15 +71,8 @@ export class LinkController {
     @Req() request: Request,
     @Body() body: WriteMessageDto,
   ): Promise<PublicOrderDto> {
-    await this.limitAnswers(token, request);
+    await this.limits.answering(token, request);
     await this.links.reply(token, body.text);
     return this.views.public(await this.links.open(token));
-  }
-
-  /** By order and not by token: each mail brings a token of its own. */
-  private async limitAnswers(token: string, request: Request): Promise<void> {
-    await this.limits.take('link-ip', request.ip ?? '');
-    const { order } = await this.links.open(token);
-    await this.limits.take('link-answer', order.id);
   }
 }

@@ -1,20 +1,18 @@
 import { HttpStatus, Injectable } from '@nestjs/common';
 import { InjectDataSource } from '@nestjs/typeorm';
-import { DataSource, type EntityManager, In } from 'typeorm';
+import { DataSource, type EntityManager } from 'typeorm';
 import { AuditService } from '../audit/audit.service';
 import { Problem } from '../common/problem';
 import { hashToken } from '../common/secret-token';
-import { InjectSettings, type Settings } from '../config/settings';
-import { MailService, type MailToSend } from '../mail/mail.service';
 import type { CushionOrder } from './entities/cushion-order.entity';
-import { OrderEvent } from './entities/order-event.entity';
 import { OrderLink } from './entities/order-link.entity';
 import { OrderMessage } from './entities/order-message.entity';
 import { isLinkToken } from './link-token';
-import { lockOrder, ofItsUpholsterer } from './order-access';
-import { contactOf } from './order-contact';
-import type { SentContent } from './order-content';
-import { acknowledgedMail, replyMail, type UpholstererNews } from './order-mail';
+import { lockOrder } from './order-access';
+import { acceptedQuote, acknowledgementOf, requireSameSending } from './order-agreement';
+import { sameContent, type SentContent } from './order-content';
+import { OrderLetters } from './order-letters.service';
+import { acknowledgedMail, replyMail } from './order-mail';
 import { recordEvent } from './order-record';
 import { isOver, STATE_WORDS } from './order-states';
 
@@ -29,8 +27,7 @@ export interface LinkedOrder {
 export class LinkService {
   constructor(
     @InjectDataSource() private readonly dataSource: DataSource,
-    @InjectSettings() private readonly config: Settings,
-    private readonly mail: MailService,
+    private readonly letters: OrderLetters,
     private readonly audit: AuditService,
   ) {}
 
@@ -65,12 +62,7 @@ export class LinkService {
   async acknowledge(token: string, name: string, sentAt?: string): Promise<void> {
     await this.dataSource.transaction(async (manager) => {
       const order = await this.lock(token, manager);
-      if (sentAt !== undefined && Date.parse(sentAt) !== Date.parse(order.sent.at)) {
-        throw Problem.conflict(
-          'order-sent-again',
-          'The workshop sent this order again meanwhile. Read it anew first.',
-        );
-      }
+      requireSameSending(order, sentAt);
       if (await acknowledgementOf(manager, order)) return;
       await recordEvent(
         manager,
@@ -78,8 +70,10 @@ export class LinkService {
         { kind: 'acknowledged', side: 'upholsterer', byId: null, byName: name },
       );
       await this.record(manager, order, 'cushion-order.acknowledged');
-      const news = await this.news(manager, order);
-      await this.post(manager, order, acknowledgedMail(news, name, order.sent.revisionLetter));
+      const agreed = order.state === 'quoted' && (await this.agree(manager, order, name));
+      const news = await this.letters.addressed(manager, order);
+      const mail = acknowledgedMail(news, { name, revisionLetter: order.sent.revisionLetter, agreed });
+      await this.letters.post(manager, order, mail);
     });
   }
 
@@ -97,11 +91,12 @@ export class LinkService {
         }),
       );
       await this.record(manager, order, 'cushion-order.replied');
-      await this.post(manager, order, replyMail(await this.news(manager, order), text));
+      await this.letters.post(manager, order, replyMail(await this.letters.addressed(manager, order), text));
     });
   }
 
-  private async lock(token: string, manager: EntityManager): Promise<CushionOrder & { sent: SentContent }> {
+  /** The order behind a token; nobody else changes it until the transaction ends. */
+  async lock(token: string, manager: EntityManager): Promise<CushionOrder & { sent: SentContent }> {
     const { order: opened } = await this.open(token, manager);
     const { workshopId, productionId, id: orderId } = opened;
     const order = await lockOrder(manager, { workshopId, productionId, orderId });
@@ -114,26 +109,24 @@ export class LinkService {
         `This order is ${STATE_WORDS[order.state]}. Telephone the workshop.`,
       );
     }
-    return { ...order, sent };
+    return Object.assign(order, { sent });
   }
 
-  private async news(
-    manager: EntityManager,
-    order: CushionOrder & { sent: SentContent },
-  ): Promise<UpholstererNews> {
-    const contact = await contactOf(manager, order, order.sent);
-    return {
-      to: contact.email,
-      recipientName: contact.name,
-      upholstererName: order.upholsterer?.name ?? 'The upholsterer',
-      number: order.number,
-      title: order.sent.title,
-      orderUrl: `${this.config.publicUrl}/w/${order.workshopId}/p/${order.productionId}/orders/${order.id}`,
-    };
-  }
-
-  private async post(manager: EntityManager, order: CushionOrder, mail: MailToSend): Promise<void> {
-    await this.mail.enqueue(manager, { ...mail, workshopId: order.workshopId, relatedId: order.id });
+  /** Both sides have said yes to what was last sent, the workshop by accepting the quote for it. */
+  private async agree(manager: EntityManager, order: CushionOrder, name: string): Promise<boolean> {
+    if (!order.sent || !sameContent(order.sent, order)) return false;
+    if (!(await acceptedQuote(manager, order))) return false;
+    const fromState = order.state;
+    order.state = 'agreed';
+    await manager.save(order);
+    await recordEvent(manager, order, {
+      kind: 'state',
+      side: 'upholsterer',
+      byId: null,
+      byName: name,
+      fromState,
+    });
+    return true;
   }
 
   private record(manager: EntityManager, order: CushionOrder, action: string): Promise<void> {
@@ -146,16 +139,4 @@ export class LinkService {
       subjectId,
     });
   }
-}
-
-/** The word of the upholsterer who has the order on what was last sent, if it was given. */
-export async function acknowledgementOf(
-  manager: EntityManager,
-  order: CushionOrder,
-): Promise<OrderEvent | null> {
-  const last = await manager.findOne(OrderEvent, {
-    where: { orderId: order.id, ...ofItsUpholsterer(order), kind: In(['sent', 'acknowledged']) },
-    order: { at: 'DESC' },
-  });
-  return last?.kind === 'acknowledged' ? last : null;
 }

@@ -31,7 +31,15 @@ export interface OrderContent {
   /** null: every cushion of the revision */
   cushionMarks: string[] | null;
   spec: OrderSpec;
+  /** How far a finished size may be off; absent in what was sent before it could be agreed. */
+  toleranceMm?: number;
 }
+
+/** A quarter of an inch either way, unless an order says otherwise. */
+export const DEFAULT_TOLERANCE_MM = 6.35;
+
+export const toleranceOf = ({ toleranceMm }: Pick<OrderContent, 'toleranceMm'>): number =>
+  toleranceMm ?? DEFAULT_TOLERANCE_MM;
 
 /** The content as the upholsterer last received it. */
 export interface SentContent extends OrderContent {
@@ -42,17 +50,18 @@ export interface SentContent extends OrderContent {
 
 export function contentOf(from: OrderContent): OrderContent {
   const { revisionLetter, title, neededBy, cushionMarks, spec } = from;
-  return { revisionLetter, title, neededBy, cushionMarks, spec };
+  return { revisionLetter, title, neededBy, cushionMarks, spec, toleranceMm: toleranceOf(from) };
 }
 
 export function sameContent(a: OrderContent, b: OrderContent): boolean {
-  const plain = ({ revisionLetter, title, neededBy, cushionMarks, spec }: OrderContent) =>
+  const plain = ({ revisionLetter, title, neededBy, cushionMarks, spec, toleranceMm }: OrderContent) =>
     JSON.stringify([
       revisionLetter,
       title,
       neededBy,
       cushionMarks && [...cushionMarks].sort(),
       SPEC_KEYS.map((key) => spec[key]),
+      toleranceOf({ toleranceMm }),
     ]);
   return plain(a) === plain(b);
 }

@@ -6,22 +6,20 @@ import type { MemberInfo } from '../common/access.decorator';
 import type { Page, PageQuery } from '../common/page.dto';
 import { Problem } from '../common/problem';
 import { readPage } from '../common/read-page';
-import { InjectSettings, type Settings } from '../config/settings';
 import { MailService } from '../mail/mail.service';
 import { ProductionsService } from '../productions/productions.service';
 import { UpholsterersService } from '../upholsterers/upholsterers.service';
 import { UsersService } from '../users/users.service';
 import { WorkshopsService } from '../workshops/workshops.service';
-import { dayInWords } from './day-in-words';
 import type { SendOrderDto } from './dto/write-order.dto';
 import { CushionOrder } from './entities/cushion-order.entity';
 import { OrderMessage } from './entities/order-message.entity';
 import { findOrder, lockOrder, type OrderPlace } from './order-access';
 import { contentOf } from './order-content';
-import { makeLink, revokeLinks } from './order-links';
+import { OrderLetters } from './order-letters.service';
+import { revokeLinks } from './order-links';
 import {
   lastLetter,
-  type OrderLetter,
   orderMail,
   OUTGOING_KINDS,
   renewedLinkMail,
@@ -37,7 +35,7 @@ import { isOver, maySend, STATE_WORDS } from './order-states';
 export class OrderCorrespondence {
   constructor(
     @InjectDataSource() private readonly dataSource: DataSource,
-    @InjectSettings() private readonly config: Settings,
+    private readonly letters: OrderLetters,
     private readonly paper: OrderPaper,
     private readonly productions: ProductionsService,
     private readonly upholsterers: UpholsterersService,
@@ -64,6 +62,7 @@ export class OrderCorrespondence {
         await this.withdraw(manager, order, sender);
       }
       const before = order.state;
+      order.sentBefore = order.upholstererId === upholsterer.id ? order.sent : null;
       order.state = 'sent';
       order.upholstererId = upholsterer.id;
       order.upholsterer = upholsterer;
@@ -83,12 +82,12 @@ export class OrderCorrespondence {
         fromState: before,
       });
       await this.record(manager, member, 'cushion-order.sent', order.id);
-      const letter = await this.letter(manager, order, sender, message);
+      const letter = await this.letters.letter(manager, order, sender, message);
       const pack = {
         filename: `cushion-order-${order.number}-${order.revisionLetter}.pdf`,
         content: await this.paper.pack(order, order.sent),
       };
-      await this.post(manager, order, orderMail(letter, pack));
+      await this.letters.post(manager, order, orderMail(letter, pack));
       return findOrder(manager, place);
     });
   }
@@ -114,7 +113,11 @@ export class OrderCorrespondence {
       requireCorrespondent(order);
       const message = await this.keepMessage(manager, order, author, text);
       message.upholsterer = order.upholsterer;
-      await this.post(manager, order, workshopMessageMail(await this.letter(manager, order, author, text)));
+      await this.letters.post(
+        manager,
+        order,
+        workshopMessageMail(await this.letters.letter(manager, order, author, text)),
+      );
       return message;
     });
   }
@@ -127,7 +130,11 @@ export class OrderCorrespondence {
       await revokeLinks(manager, order.id);
       await recordEvent(manager, order, { kind: 'link-renewed', byId: author.id, byName: author.name });
       await this.record(manager, member, 'cushion-order.link-renewed', order.id);
-      await this.post(manager, order, renewedLinkMail(await this.letter(manager, order, author, '')));
+      await this.letters.post(
+        manager,
+        order,
+        renewedLinkMail(await this.letters.letter(manager, order, author, '')),
+      );
       return findOrder(manager, place);
     });
   }
@@ -169,35 +176,7 @@ export class OrderCorrespondence {
     if (!sent || !earlier || earlier.removedAt !== null) return;
     const workshop = await this.workshops.get(order.workshopId, manager);
     const mail = withdrawnMail(lastLetter(workshop, sender, earlier, { ...order, title: sent.title }));
-    await this.post(manager, order, mail);
-  }
-
-  private async letter(
-    manager: EntityManager,
-    order: CushionOrder,
-    sender: { id: string; name: string; email: string },
-    message: string,
-  ): Promise<OrderLetter> {
-    const workshop = await this.workshops.get(order.workshopId, manager);
-    const { token, expiresAt } = await makeLink(manager, order.id);
-    const content = order.sent ?? order;
-    return {
-      workshopName: workshop.name,
-      workshopTelephone: workshop.telephone,
-      senderName: sender.name,
-      senderEmail: sender.email,
-      upholstererName: order.upholsterer?.name ?? '',
-      upholstererEmail: order.upholsterer?.email ?? '',
-      contactName: order.upholsterer?.contactName ?? '',
-      number: order.number,
-      title: content.title,
-      revisionLetter: content.revisionLetter,
-      neededBy: content.neededBy === null ? null : dayInWords(content.neededBy),
-      cushionCount: order.cushionCount,
-      linkUrl: `${this.config.publicUrl}/order/${token}`,
-      linkExpires: dayInWords(expiresAt.toISOString().slice(0, 10)),
-      message,
-    };
+    await this.letters.post(manager, order, mail);
   }
 
   private keepMessage(
@@ -217,14 +196,6 @@ export class OrderCorrespondence {
         text,
       }),
     );
-  }
-
-  private async post(
-    manager: EntityManager,
-    order: CushionOrder,
-    mail: Parameters<MailService['enqueue']>[1],
-  ): Promise<void> {
-    await this.mail.enqueue(manager, { ...mail, workshopId: order.workshopId, relatedId: order.id });
   }
 
   private record(manager: EntityManager, member: MemberInfo, action: string, orderId: string): Promise<void> {

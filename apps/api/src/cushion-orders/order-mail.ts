@@ -5,6 +5,7 @@ export const OUTGOING_KINDS = [
   'cushion-order',
   'cushion-order-link',
   'cushion-order-message',
+  'cushion-order-news',
   'cushion-order-cancelled',
 ] as const;
 
@@ -93,6 +94,38 @@ export interface UpholstererNews {
   orderUrl: string;
 }
 
+/** Something that happened to an order, as the other side is told. */
+export interface News {
+  /** ends the subject: "the quote is accepted" */
+  about: string;
+  /** paragraphs */
+  words: readonly string[];
+}
+
+export function newsForUpholsterer(letter: OrderLetter, { about, words }: News): MailToSend {
+  return {
+    to: letter.upholstererEmail,
+    replyTo: letter.senderEmail,
+    kind: 'cushion-order-news',
+    subject: `Cushion order ${letter.number} from ${letter.workshopName}: ${about}`,
+    text: paragraphs([greeting(letter), ...words, linkWords(letter), signature(letter)]),
+  };
+}
+
+export function newsForWorkshop(news: UpholstererNews, { about, words }: News): MailToSend {
+  return {
+    to: news.to,
+    kind: 'cushion-order-progress',
+    subject: `Cushion order ${news.number}: ${about}`,
+    text: paragraphs([
+      `Dear ${news.recipientName},`,
+      `About cushion order ${news.number}, “${news.title}”, with ${news.upholstererName}:`,
+      ...words,
+      `The order:\n${news.orderUrl}`,
+    ]),
+  };
+}
+
 export function replyMail(news: UpholstererNews, text: string): MailToSend {
   return {
     to: news.to,
@@ -107,7 +140,10 @@ export function replyMail(news: UpholstererNews, text: string): MailToSend {
   };
 }
 
-export function acknowledgedMail(news: UpholstererNews, name: string, revisionLetter: string): MailToSend {
+export function acknowledgedMail(
+  news: UpholstererNews,
+  { name, revisionLetter, agreed }: { name: string; revisionLetter: string; agreed: boolean },
+): MailToSend {
   return {
     to: news.to,
     kind: 'cushion-order-acknowledged',
@@ -116,6 +152,7 @@ export function acknowledgedMail(news: UpholstererNews, name: string, revisionLe
       `Dear ${news.recipientName},`,
       `${name} of ${news.upholstererName} can make cushion order ${news.number}, “${news.title}”, ` +
         `as revision ${revisionLetter} is drawn.`,
+      agreed ? `You accepted the quote for it, so revision ${revisionLetter} is agreed.` : '',
       `The order:\n${news.orderUrl}`,
     ]),
   };

@@ -4,15 +4,16 @@ import { DataSource, type EntityManager } from 'typeorm';
 import { AuditService } from '../audit/audit.service';
 import type { MemberInfo } from '../common/access.decorator';
 import { Problem } from '../common/problem';
-import { MailService } from '../mail/mail.service';
+import type { User } from '../users/entities/user.entity';
 import { UsersService } from '../users/users.service';
 import { WorkshopsService } from '../workshops/workshops.service';
 import type { CushionOrder } from './entities/cushion-order.entity';
-import { acknowledgementOf } from './link.service';
 import { findOrder, lockOrder, type OrderPlace } from './order-access';
-import { sameContent } from './order-content';
+import { acknowledgementOf, deliveryOf, firstArticleOf, requireUnchanged } from './order-agreement';
+import { OrderLetters } from './order-letters.service';
 import { cancelledMail, lastLetter } from './order-mail';
 import { recordEvent } from './order-record';
+import { QuotesService } from './quotes/quotes.service';
 import { mayFollow, type RecordedState, recordableAfter, STATE_WORDS } from './order-states';
 
 /** States that the workshop records by hand: its own, and those it heard of from the upholsterer. */
@@ -22,7 +23,8 @@ export class OrderProgress {
     @InjectDataSource() private readonly dataSource: DataSource,
     private readonly users: UsersService,
     private readonly workshops: WorkshopsService,
-    private readonly mail: MailService,
+    private readonly letters: OrderLetters,
+    private readonly quotes: QuotesService,
     private readonly audit: AuditService,
   ) {}
 
@@ -37,9 +39,11 @@ export class OrderProgress {
       const order = await lockOrder(manager, place);
       requireStep(order, to);
       if (to === 'agreed') await requireAgreement(manager, order, note);
+      await requireInspected(manager, order, to, note);
       const from = order.state;
       order.state = to;
       await manager.save(order);
+      if (to === 'agreed') await this.quotes.settle(manager, order, author.name);
       await recordEvent(manager, order, {
         kind: 'state',
         byId: author.id,
@@ -55,14 +59,30 @@ export class OrderProgress {
         subjectId: order.id,
         detail: { from, to },
       });
-      const told = order.upholsterer;
-      if (to === 'cancelled' && from !== 'draft' && order.sent && told && told.removedAt === null) {
-        const workshop = await this.workshops.get(order.workshopId, manager);
-        const mail = cancelledMail(lastLetter(workshop, author, told, { ...order, title: order.sent.title }));
-        await this.mail.enqueue(manager, { ...mail, workshopId: order.workshopId, relatedId: order.id });
-      }
+      if (from !== 'draft') await this.tell(manager, order, author, to);
       return findOrder(manager, place);
     });
+  }
+
+  private async tell(
+    manager: EntityManager,
+    order: CushionOrder,
+    author: User,
+    to: RecordedState,
+  ): Promise<void> {
+    if (!order.sent || !order.upholsterer || order.upholsterer.removedAt !== null) return;
+    if (to !== 'cancelled') {
+      await this.letters.toUpholsterer(manager, order, author, {
+        about: STATE_WORDS[to],
+        words: [
+          `We have put down cushion order ${order.number}, “${order.sent.title}”, as ${STATE_WORDS[to]}.`,
+        ],
+      });
+      return;
+    }
+    const workshop = await this.workshops.get(order.workshopId, manager);
+    const told = lastLetter(workshop, author, order.upholsterer, { ...order, title: order.sent.title });
+    await this.letters.post(manager, order, cancelledMail(told));
   }
 }
 
@@ -80,17 +100,34 @@ function requireStep(order: CushionOrder, to: RecordedState): void {
 
 /** Both sides on the same paper: the one last sent. */
 async function requireAgreement(manager: EntityManager, order: CushionOrder, note: string): Promise<void> {
-  if (order.sent && !sameContent(order.sent, order)) {
-    throw Problem.conflict(
-      'changed-since-sent',
-      'The order was changed after it was sent. Send it again: both sides agree to the same revision.',
-    );
-  }
+  requireUnchanged(order);
   if (note.trim() === '' && !(await acknowledgementOf(manager, order))) {
     throw Problem.conflict(
       'not-acknowledged',
       'The upholsterer has not yet said through the link that they can make the order as last sent. ' +
         'Wait for that, or write in the note how and with whom it was agreed.',
+    );
+  }
+}
+
+/** The batch waits for the first article, and the end for the delivery, unless a note says how it is known. */
+async function requireInspected(
+  manager: EntityManager,
+  order: CushionOrder,
+  to: RecordedState,
+  note: string,
+): Promise<void> {
+  if (note.trim() !== '') return;
+  if (to === 'in-work' && (await firstArticleOf(manager, order)) !== 'accepted') {
+    throw Problem.conflict(
+      'first-article-not-accepted',
+      'The first article was not accepted yet. Inspect it, or write in the note how it is known to be right.',
+    );
+  }
+  if (to === 'closed' && (await deliveryOf(manager, order)) !== 'accepted') {
+    throw Problem.conflict(
+      'delivery-not-accepted',
+      'The delivery was not accepted yet. Inspect it, or write in the note why the order is closed.',
     );
   }
 }

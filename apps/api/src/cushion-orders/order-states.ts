@@ -25,6 +25,10 @@ export const RECORDED_STATES = [
 ] as const satisfies readonly OrderState[];
 export type RecordedState = (typeof RECORDED_STATES)[number];
 
+/** States that the upholsterer marks on the private page; quoting and agreeing have routes of their own. */
+export const MARKED_STATES = ['first-article', 'in-work', 'shipped'] as const satisfies readonly OrderState[];
+export type MarkedState = (typeof MARKED_STATES)[number];
+
 const NEXT: Record<OrderState, readonly OrderState[]> = {
   draft: ['sent', 'cancelled'],
   sent: ['quoted', 'cancelled'],
@@ -66,6 +70,9 @@ export const mayFollow = (from: OrderState, to: OrderState): boolean => NEXT[fro
 export function recordableAfter(from: OrderState): RecordedState[] {
   return RECORDED_STATES.filter((to) => mayFollow(from, to));
 }
+
+/** While nothing is agreed, the upholsterer may name a price, or another. */
+export const mayQuote = (state: OrderState): boolean => state === 'sent' || state === 'quoted';
 
 export const maySend = (state: OrderState): boolean => SENDABLE.has(state);
 export const mayChange = (state: OrderState): boolean => CHANGEABLE.has(state);

@@ -17,8 +17,9 @@ import type { CushionOrder } from './entities/cushion-order.entity';
 import { OrderEvent } from './entities/order-event.entity';
 import { OrderMessage } from './entities/order-message.entity';
 import { IssuedSets } from './issued-sets.service';
-import { acknowledgementOf, type LinkedOrder } from './link.service';
+import type { LinkedOrder } from './link.service';
 import { ofItsUpholsterer } from './order-access';
+import { acknowledgementOf } from './order-agreement';
 import { contactOf } from './order-contact';
 import { sameContent } from './order-content';
 import { linkState } from './order-links';
@@ -26,15 +27,22 @@ import { OUTGOING_KINDS } from './order-mail';
 import { mayChange, maySend, recordableAfter } from './order-states';
 
 const UNANSWERED = `
-  SELECT message.order_id AS "orderId", count(*)::int AS count
-    FROM order_messages message
-    JOIN cushion_orders ordered ON ordered.id = message.order_id AND ordered.upholsterer_id = message.upholsterer_id
-   WHERE message.order_id = ANY($1) AND message.side = 'upholsterer'
-     AND message.at > coalesce(
-       (SELECT max(answer.at) FROM order_messages answer
-         WHERE answer.order_id = message.order_id AND answer.upholsterer_id = message.upholsterer_id
-           AND answer.side = 'workshop'), '-infinity')
-   GROUP BY message.order_id`;
+  SELECT open.order_id AS "orderId", count(*)::int AS count
+    FROM (
+      SELECT message.order_id, message.upholsterer_id
+        FROM order_messages message
+       WHERE message.order_id = ANY($1) AND message.side = 'upholsterer'
+         AND message.at > coalesce(
+           (SELECT max(answer.at) FROM order_messages answer
+             WHERE answer.order_id = message.order_id AND answer.upholsterer_id = message.upholsterer_id
+               AND answer.side = 'workshop'), '-infinity')
+      UNION ALL
+      SELECT question.order_id, question.upholsterer_id
+        FROM order_questions question
+       WHERE question.order_id = ANY($1) AND question.answered_at IS NULL
+    ) open
+    JOIN cushion_orders ordered ON ordered.id = open.order_id AND ordered.upholsterer_id = open.upholsterer_id
+   GROUP BY open.order_id`;
 
 /** What members and link holders read about an order. */
 @Injectable()
@@ -73,6 +81,7 @@ export class OrderViews {
       revisionIssuedAt: issued.issuedAt.toISOString(),
       cushionMarks: order.cushionMarks,
       spec: order.spec,
+      toleranceMm: order.toleranceMm,
       cushions: cushions,
       sent: order.sent && {
         revisionLetter: order.sent.revisionLetter,

@@ -12,7 +12,7 @@ import type { CreateOrderDto, UpdateOrderDto } from './dto/write-order.dto';
 import { CushionOrder } from './entities/cushion-order.entity';
 import { IssuedSets } from './issued-sets.service';
 import { findOrder, lockOrder, type OrderPlace } from './order-access';
-import { type OrderSpec, SPEC_KEYS } from './order-content';
+import { DEFAULT_TOLERANCE_MM, type OrderSpec, SPEC_KEYS } from './order-content';
 import { recordEvent } from './order-record';
 import { mayChange, STATE_WORDS } from './order-states';
 
@@ -73,10 +73,12 @@ export class OrdersService {
           neededBy: dto.neededBy ?? null,
           cushionMarks,
           cushionCount: cushions.length,
+          toleranceMm: dto.toleranceMm ?? DEFAULT_TOLERANCE_MM,
           spec: { ...EMPTY_SPEC, ...given(dto.spec) },
           state: 'draft' as const,
           upholstererId: null,
           sent: null,
+          sentBefore: null,
           createdById: member.userId,
         }),
       );
@@ -100,6 +102,7 @@ export class OrdersService {
       order.title = dto.title ?? order.title;
       if (dto.neededBy !== undefined) order.neededBy = dto.neededBy;
       if (dto.cushionMarks !== undefined) order.cushionMarks = dto.cushionMarks;
+      order.toleranceMm = dto.toleranceMm ?? order.toleranceMm;
       order.spec = { ...order.spec, ...given(dto.spec) };
       const set = {
         member,

@@ -3,10 +3,16 @@ import { MailedToken } from '../auth/entities/mailed-token.entity';
 import { RefreshToken } from '../auth/entities/refresh-token.entity';
 import { Session } from '../auth/entities/session.entity';
 import { CastMember } from '../cast/entities/cast-member.entity';
+import { OrderPayment } from '../cushion-orders/deposits/order-payment.entity';
+import { PaymentEvent } from '../cushion-orders/deposits/payment-event.entity';
 import { CushionOrder } from '../cushion-orders/entities/cushion-order.entity';
 import { OrderEvent } from '../cushion-orders/entities/order-event.entity';
 import { OrderLink } from '../cushion-orders/entities/order-link.entity';
 import { OrderMessage } from '../cushion-orders/entities/order-message.entity';
+import { OrderFile } from '../cushion-orders/files/order-file.entity';
+import { OrderInspection } from '../cushion-orders/inspections/order-inspection.entity';
+import { OrderQuestion } from '../cushion-orders/questions/order-question.entity';
+import { OrderQuote } from '../cushion-orders/quotes/order-quote.entity';
 import { Invitation } from '../invitations/entities/invitation.entity';
 import { OutboxAttachment } from '../mail/entities/outbox-attachment.entity';
 import { OutboxMail } from '../mail/entities/outbox-mail.entity';
@@ -40,11 +46,17 @@ export const ENTITIES = [
   MailedToken,
   Membership,
   OrderEvent,
+  OrderFile,
+  OrderInspection,
   OrderLink,
   OrderMessage,
+  OrderPayment,
+  OrderQuestion,
+  OrderQuote,
   OutboxAttachment,
   OutboxMail,
   OwnPopulation,
+  PaymentEvent,
   PopulationRows,
   Production,
   RefreshToken,

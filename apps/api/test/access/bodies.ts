@@ -48,6 +48,21 @@ export function bodiesFor(shop: Shop): Record<string, object> {
     [`POST ${O}/send`]: { upholstererId },
     [`POST ${O}/state`]: { to: 'agreed' },
     [`POST ${O}/messages`]: { text: 'When?' },
+    [`POST ${O}/quotes`]: {
+      lines: [{ text: 'Cushions', quantity: 2, unitMinor: 21_000 }],
+      currency: 'USD',
+      validUntil: '2099-12-31',
+      heard: 'by telephone',
+    },
+    [`POST ${O}/quotes/{quoteId}/decline`]: { reason: 'Too dear' },
+    [`POST ${O}/questions`]: { text: 'Which thread?' },
+    [`POST ${O}/questions/{questionId}/answer`]: { answer: 'On Friday' },
+    [`POST ${O}/inspections`]: {
+      kind: 'received',
+      outcome: 'rejected',
+      note: 'Torn',
+      cushions: [{ mark: 'C1' }],
+    },
   };
 }
 

@@ -77,6 +77,17 @@ export async function createShop(test: TestApp, name: string): Promise<Shop> {
     title: 'Seats and backs',
   });
   await make(`${P}/orders/${order.id}/send`, { upholstererId: upholsterer.id }, 200);
+  const token = await mailedToken(test, email, 'cushion-order');
+  const { sentAt } = (await as(test, null).get(`/link/${token}`).expect(200)).body as { sentAt: string };
+  const answered = async (path: string, body: object) => {
+    const answer = await as(test, null).post(`/link/${token}/${path}`).send(body).expect(200);
+    return answer.body as { quotes: { id: string }[]; questions: { id: string }[] };
+  };
+  await answered('questions', { text: 'Which day does the cloth come?' });
+  const { quotes, questions } = await answered('quote', {
+    ...{ name: 'Tuft', sentAt, currency: 'USD', validUntil: '2099-12-31' },
+    lines: [{ text: 'Cushions', quantity: 2, unitMinor: 20_000 }],
+  });
   const population = await make(`${W}/populations`, surveyBody({ keepRows: true }));
   const study = await make(`${S}/studies`, {
     populationId: population.id,
@@ -109,11 +120,13 @@ export async function createShop(test: TestApp, name: string): Promise<Shop> {
       populationId: population.id,
       upholstererId: upholsterer.id,
       orderId: order.id,
+      quoteId: quotes[0]?.id ?? '',
+      questionId: questions[0]?.id ?? '',
     },
     document: draft.document,
     draftNumber: draft.number,
     partId: firstPartOf(draft.document, bench?.id ?? ''),
-    linkToken: await mailedToken(test, email, 'cushion-order'),
+    linkToken: token,
   };
 }
 

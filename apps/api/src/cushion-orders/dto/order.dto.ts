@@ -98,7 +98,9 @@ export class OrderSummaryDto {
   cushionCount: number;
   @ApiProperty({ type: OrderUpholstererDto, nullable: true })
   upholsterer: OrderUpholstererDto | null;
-  @ApiProperty({ description: 'messages of the upholsterer that nobody has answered' })
+  @ApiProperty({
+    description: 'messages of the upholsterer that nobody has answered, and questions of either side',
+  })
   openQuestions: number;
   @ApiProperty({ format: 'date-time' })
   updatedAt: string;
@@ -111,6 +113,8 @@ export class OrderDto extends OrderSummaryDto {
   cushionMarks: string[] | null;
   @ApiProperty({ type: OrderSpecDto })
   spec: OrderSpecDto;
+  @ApiProperty({ description: 'how far a finished size may be off' })
+  toleranceMm: number;
   @ApiProperty({ type: [CushionDto] })
   cushions: CushionDto[];
   @ApiProperty({ type: SentDto, nullable: true })

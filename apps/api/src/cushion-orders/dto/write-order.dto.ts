@@ -7,19 +7,23 @@ import {
   IsArray,
   IsIn,
   IsISO8601,
+  IsNumber,
   IsObject,
   IsOptional,
   IsUUID,
   Matches,
+  Max,
+  Min,
   ValidateNested,
 } from 'class-validator';
+import { CalendarDay } from '../../common/calendar-day';
+import { MayBeLeftOut } from '../../common/may-be-left-out';
 import { TextField } from '../../common/text-field';
-import { RECORDED_STATES, type RecordedState } from '../order-states';
+import { CushionMark } from '../cushion-mark';
+import { MARKED_STATES, type MarkedState, RECORDED_STATES, type RecordedState } from '../order-states';
 import { OrderSpecInput } from './order-spec.dto';
 
 const LETTER = /^[A-Z]{1,3}$/;
-const DAY = /^\d{4}-\d{2}-\d{2}$/;
-const CUSHION_MARK = /^C[1-9]\d{0,3}$/;
 
 export class CreateOrderDto {
   @ApiProperty({ format: 'uuid' })
@@ -36,8 +40,7 @@ export class CreateOrderDto {
 
   @ApiPropertyOptional({ type: String, format: 'date', nullable: true })
   @IsOptional()
-  @Matches(DAY, { message: 'neededBy accepts a day as 2027-02-26' })
-  @IsISO8601({ strict: true }, { message: 'neededBy accepts a day that is in the calendar' })
+  @CalendarDay()
   neededBy?: string | null;
 
   @ApiPropertyOptional({ type: [String], nullable: true, description: 'marks as C1; null: every cushion' })
@@ -46,8 +49,15 @@ export class CreateOrderDto {
   @ArrayMinSize(1)
   @ArrayMaxSize(300)
   @ArrayUnique()
-  @Matches(CUSHION_MARK, { each: true, message: 'cushionMarks accepts marks as C1' })
+  @CushionMark({ each: true })
   cushionMarks?: string[] | null;
+
+  @ApiPropertyOptional({ minimum: 0.5, maximum: 25.4, description: 'how far a finished size may be off' })
+  @MayBeLeftOut()
+  @IsNumber()
+  @Min(0.5)
+  @Max(25.4)
+  toleranceMm?: number;
 
   @ApiPropertyOptional({ type: OrderSpecInput })
   @IsOptional()
@@ -112,4 +122,25 @@ export class AcknowledgeDto {
   @IsOptional()
   @IsISO8601({ strict: true })
   sentAt?: string;
+}
+
+export class MarkStateDto {
+  @ApiProperty({ enum: MARKED_STATES, enumName: 'MarkedOrderState' })
+  @IsIn(MARKED_STATES)
+  to: MarkedState;
+
+  @ApiProperty({ minLength: 1, maxLength: 120, description: 'who says so, typed' })
+  @TextField({ min: 1, max: 120 })
+  name: string;
+
+  @ApiPropertyOptional({ maxLength: 1000, description: 'as the carrier and its number' })
+  @IsOptional()
+  @TextField({ max: 1000, lines: true })
+  note?: string;
+}
+
+export class MailBouncedDto {
+  @ApiProperty({ minLength: 1, maxLength: 500, description: 'what came back' })
+  @TextField({ min: 1, max: 500, lines: true })
+  note: string;
 }

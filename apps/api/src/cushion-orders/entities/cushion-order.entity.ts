@@ -14,7 +14,7 @@ import { Production } from '../../productions/entities/production.entity';
 import { DesignedSet } from '../../sets/entities/designed-set.entity';
 import { SetRevision } from '../../sets/entities/set-revision.entity';
 import { Upholsterer } from '../../upholsterers/entities/upholsterer.entity';
-import type { OrderContent, OrderSpec, SentContent } from '../order-content';
+import { DEFAULT_TOLERANCE_MM, type OrderContent, type OrderSpec, type SentContent } from '../order-content';
 import type { OrderState } from '../order-states';
 
 @Entity('cushion_orders')
@@ -71,6 +71,10 @@ export class CushionOrder implements OrderContent {
   @Column('jsonb')
   spec: OrderSpec;
 
+  /** How far a finished size may be off, either way. */
+  @Column('double precision', { default: DEFAULT_TOLERANCE_MM })
+  toleranceMm: number;
+
   @Column('text', { default: 'draft' })
   state: OrderState;
 
@@ -83,6 +87,10 @@ export class CushionOrder implements OrderContent {
 
   @Column({ type: 'jsonb', nullable: true })
   sent: SentContent | null;
+
+  /** What the same upholsterer had before that, to say what changed. */
+  @Column({ type: 'jsonb', nullable: true })
+  sentBefore: SentContent | null;
 
   @Column('uuid')
   createdById: string;

@@ -20,6 +20,17 @@ export const EVENT_KINDS = [
   'state',
   'link-renewed',
   'link-revoked',
+  'quote-given',
+  'quote-accepted',
+  'quote-declined',
+  'first-article-accepted',
+  'first-article-rejected',
+  'delivery-accepted',
+  'delivery-rejected',
+  'deposit-paid',
+  'deposit-recorded',
+  'refund-recorded',
+  'mail-bounced',
 ] as const;
 export type EventKind = (typeof EVENT_KINDS)[number];
 

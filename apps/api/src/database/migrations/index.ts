@@ -8,6 +8,7 @@ import { ErasedNames1796158800000 } from './1796158800000-erased-names';
 import { PopulationsAndStudies1796161490650 } from './1796161490650-populations-and-studies';
 import { AgeOfCastMembers1796165200000 } from './1796165200000-age-of-cast-members';
 import { DimensionSearches1796170200000 } from './1796170200000-dimension-searches';
+import { LifeOfAnOrder1796201340000 } from './1796201340000-life-of-an-order';
 
 /** In the order in which they run. What is merged is never changed. */
 export const MIGRATIONS: (new () => MigrationInterface)[] = [
@@ -20,4 +21,5 @@ export const MIGRATIONS: (new () => MigrationInterface)[] = [
   PopulationsAndStudies1796161490650,
   AgeOfCastMembers1796165200000,
   DimensionSearches1796170200000,
+  LifeOfAnOrder1796201340000,
 ];

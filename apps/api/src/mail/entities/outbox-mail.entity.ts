@@ -3,8 +3,9 @@ import { Column, CreateDateColumn, Entity, Index, PrimaryGeneratedColumn } from 
 /**
  * `perhaps-sent`: a process ended between handing the mail over and noting it, or the line broke after the
  * text had gone out. Such a mail is never sent again by itself.
+ * `bounced`: it came back, as a person says who saw it come back.
  */
-export const MAIL_STATES = ['queued', 'sending', 'sent', 'failed', 'perhaps-sent'] as const;
+export const MAIL_STATES = ['queued', 'sending', 'sent', 'failed', 'perhaps-sent', 'bounced'] as const;
 export type MailState = (typeof MAIL_STATES)[number];
 
 @Entity('outbox_mails')
