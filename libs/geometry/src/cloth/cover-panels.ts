@@ -17,15 +17,26 @@ export interface CoverCloth {
   repeatMm: { acrossMm: number; alongMm: number };
 }
 
+/** What a cover is cut for: the faces that are looked at, the strips round the edge, the welt. */
+export const COVER_PARTS = ['faces', 'edges', 'welt'] as const;
+export type CoverPart = (typeof COVER_PARTS)[number];
+
 /** A cushion whose panels are cut from a cloth. */
 export interface CoveredCushion {
   mark: string;
   make: CushionMake;
   made: CushionPanels;
+  /** What of it is cut from this cloth; everything when absent. */
+  parts?: readonly CoverPart[];
+  /** From its middle to the line on which the pattern is centered, to the right on the plan; 0 when absent. */
+  controlMm?: number;
 }
 
-/** Panels whose pattern is placed: the faces that are looked at. */
+/** Panels whose pattern is placed. */
 const FACES: ReadonlySet<string> = new Set(['plate', TUFTED_FACE, 'cover', 'top, front and bottom']);
+
+/** What of a cover a panel belongs to. */
+export const coverPart = (panelName: string): CoverPart => (FACES.has(panelName) ? 'faces' : 'edges');
 
 /** Width that panels may take up. */
 export const usableWidthMm = ({ widthMm, selvedgeMm }: CoverCloth): number => widthMm - 2 * selvedgeMm;
@@ -47,32 +58,34 @@ export function coverPanels(
   settings: CushionSettings = CUSHION_SETTINGS,
 ): ClothPanel[] {
   const usable = usableWidthMm(cloth);
-  const panels = cushions.flatMap(({ mark, made }) =>
+  const panels = cushions.flatMap(({ mark, made, parts, controlMm = 0 }) =>
     made.panels.flatMap(({ name, count, cut }) => {
+      const part = coverPart(name);
+      if (parts && !parts.includes(part)) return [];
       const { widthMm, depthMm } = outlineExtent(cut);
-      const isFace = FACES.has(name);
       return Array.from({ length: count }, (_, n) => {
         const id = count === 1 ? `${mark} ${name}` : `${mark} ${name} ${n + 1}`;
-        return isFace
-          ? [face(id, widthMm, depthMm, cloth, settings)]
+        return part === 'faces'
+          ? [face(id, { widthMm, lengthMm: depthMm }, controlMm, cloth, settings)]
           : strips(id, widthMm, depthMm, cloth, settings);
       }).flat();
     }),
   );
-  return [...panels, ...weltPanels(cushions, usable, settings)];
+  const welted = cushions.filter(({ parts }) => !parts || parts.includes('welt'));
+  return [...panels, ...weltPanels(welted, usable, settings)];
 }
 
 function face(
   id: string,
-  widthMm: number,
-  lengthMm: number,
+  { widthMm, lengthMm }: { widthMm: number; lengthMm: number },
+  fromMiddleMm: number,
   { lies, repeatMm }: CoverCloth,
   settings: CushionSettings,
 ): ClothPanel {
   const panel: ClothPanel = { id, widthMm, lengthMm, lies };
   if (repeatMm.acrossMm <= 0 && repeatMm.alongMm <= 0) return panel;
-  // The pattern is centered on the cushion and starts at its front seam.
-  return { ...panel, controlMm: { acrossMm: widthMm / 2, alongMm: settings.seam.valueMm } };
+  // The pattern is centered on the control line and starts at the front seam.
+  return { ...panel, controlMm: { acrossMm: widthMm / 2 + fromMiddleMm, alongMm: settings.seam.valueMm } };
 }
 
 /** A strip in one piece, or pieced from equal ones when it has to lie across a narrower roll. */
