@@ -6,7 +6,7 @@ import { hiddenStretches, SHORTEST_MM } from './hidden-stretches.ts';
 import { hidersOf, type Hiders } from './hiders.ts';
 import { without } from './intervals.ts';
 import { lineTracks, type PageArc, type PageLine } from './line-tracks.ts';
-import { pageFrame, pagePoint, sectionDepth, type SetView } from './set-view.ts';
+import { pageFrame, pagePoint, sectionDepth, type PageFrame, type SetView } from './set-view.ts';
 import { convexOutline, partEdges } from './solid-outline.ts';
 import { behindSection, viewEdges } from './view-edges.ts';
 import { viewSolid, type ConvexSolid, type PageCircle, type ViewSolid } from './view-solid.ts';
@@ -78,23 +78,53 @@ function hiddenArc({ centre, radiusMm }: PageCircle, hiders: Hiders) {
   }).flat();
 }
 
+/** From where parts are seen, in numbers. */
+export interface SeenFrom {
+  frame: PageFrame;
+  /** Toward the eye: what stands before this is taken away; infinite where nothing is cut. */
+  depth: number;
+  hidden: SetView['hidden'];
+  /** Whether overhead pieces before the section are shown dashed. */
+  showsAbove: boolean;
+}
+
 /**
  * Draws parts square from one side: what is seen, what is hidden, what a section cuts.
- *
- * Hidden lines are exact for boxes and prisms; a round part hides as a figure of 64 sides would.
  *
  * @param parts - of the whole set, placed
  * @param view - from where, cut where
  * @param isOverhead - pieces that a plan shows dashed where they stand above its section
- * @returns lines without doubles: of two that lie on each other the stronger is kept
+ * @returns as `seenLinesFrom`
  */
 export function seenLines(
   parts: readonly Part[],
   view: SetView,
   isOverhead: (pieceId: string) => boolean = () => false,
 ): SeenLines {
-  const frame = pageFrame(view.direction);
-  const depth = sectionDepth(view);
+  const from = {
+    frame: pageFrame(view.direction),
+    depth: sectionDepth(view),
+    hidden: view.hidden,
+    showsAbove: view.direction === 'above',
+  };
+  return seenLinesFrom(parts, from, isOverhead);
+}
+
+/**
+ * Draws parts as seen from anywhere far off: what is seen, what is hidden, what a section cuts.
+ *
+ * Hidden lines are exact for boxes and prisms; a round part hides as a figure of 64 sides would.
+ *
+ * @param parts - of the whole set, placed
+ * @param from - frame of the page and section
+ * @param isOverhead - pieces that a plan shows dashed where they stand above its section
+ * @returns lines without doubles: of two that lie on each other the stronger is kept
+ */
+export function seenLinesFrom(
+  parts: readonly Part[],
+  { frame, depth, hidden: hiddenEdges, showsAbove }: SeenFrom,
+  isOverhead: (pieceId: string) => boolean = () => false,
+): SeenLines {
   const solids = parts.map((part) => viewSolid(part, frame));
   const nearest = (convex: readonly ConvexSolid[], n: 'min' | 'max') =>
     n === 'min' ? Math.min(...convex.map(({ min }) => min[2])) : Math.max(...convex.map(({ max }) => max[2]));
@@ -129,7 +159,7 @@ export function seenLines(
     const seam = SEAMS.has(part.role);
     const [edgeInk, seamInk] = [inkOf('edge', part.pieceId), inkOf('seam', part.pieceId)];
     const seen = seam ? seamInk : edgeInk;
-    const hidden = view.hidden === 'dashed' && !seam ? inkOf('hidden', part.pieceId) : undefined;
+    const hidden = hiddenEdges === 'dashed' && !seam ? inkOf('hidden', part.pieceId) : undefined;
     for (const edge of viewEdges(solid)) {
       const rest = behindSection(edge, depth);
       if (!rest) continue;
@@ -169,7 +199,7 @@ export function seenLines(
       } else points.forEach((from, i) => tracks.addLine(from, points[(i + 1) % points.length]!, ink));
     }
   }
-  if (view.direction === 'above') {
+  if (showsAbove) {
     const away = solids.filter(
       ({ convex, part }) => nearest(convex, 'min') >= depth && isOverhead(part.pieceId),
     );
