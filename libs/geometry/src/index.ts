@@ -42,7 +42,6 @@ export { FIGURE_KEYS, type FigureMeans } from './mannequin/figure.ts';
 export type { MannequinJoints } from './mannequin/joints.ts';
 export { MANNEQUIN_TAGS, mannequinMesh, type MannequinDetail, type MannequinMesh } from './mannequin/mesh.ts';
 export { bodyRange, ghostPoses, type BodyRange } from './mannequin/body-range.ts';
-export { childFigure, type ChildFigure } from './mannequin/child-figure.ts';
 export {
   poseMannequin,
   type MannequinPose,

@@ -53,6 +53,21 @@ describe('fit sheets made on the server', () => {
     ]);
   });
 
+  it('know of a child what a size mark says, and nothing of it is a pass', async () => {
+    const document = withSitters({ kind: 'child', sizeMark: 3 });
+    const { rows } = fit.sheetFor(document, [], null);
+    expect(rows[0]).toMatchObject({ name: 'Child, size mark 3', kind: 'mannequin' });
+    expect(['notKnown', 'wontFit']).toContain(rows[0]!.worst);
+    const unknown = rows[0]!.cells.filter(
+      ({ outcome }) => 'reason' in outcome && outcome.reason === 'not known of a child',
+    );
+    expect(unknown.length).toBeGreaterThan(5);
+    expect(fit.bodiesFor(document, [])).toHaveLength(1);
+    for await (const next of fit.measureNext(document, [], null, { left: 9, leftOut: [] })) {
+      throw new Error(`asked for a measure of ${next.castId}`);
+    }
+  });
+
   it('know no check of a place whose person was erased, draw no body there and ask for no measure', async () => {
     const erased: CastPerson = { ...HETTY, name: 'removed sitter 1', noBody: true };
     const document = withSitters({ kind: 'cast', castId: HETTY.id }, mannequin(50));

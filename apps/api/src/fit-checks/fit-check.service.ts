@@ -51,7 +51,10 @@ const settingsOf = ({ asked }: SetDocument, confidence: number | null): CheckSet
 @Injectable()
 export class FitCheckService {
   readonly ruleBook: RuleBook = loadRuleBook(readSeedData('fit-rules'));
-  private readonly model: BodyModel = createBodyModel(readSeedData('populations/ansur2'));
+  private readonly model: BodyModel = createBodyModel(
+    readSeedData('populations/ansur2'),
+    readSeedData('populations/children'),
+  );
   private readonly recent = new RecentAnswers<NextMeasures>(RECENT);
 
   /** `confidence` is what the workshop asks of a verdict; null: as much as the rule book does. */
@@ -146,16 +149,11 @@ export class FitCheckService {
         const known = people.get(sitter.castId);
         return known ? [{ ...known, kind: 'cast', placeId }] : [];
       }
-      const name = mannequinName(sitter);
-      return [
-        {
-          id: `mannequin:${placeId}`,
-          name,
-          kind: 'mannequin',
-          placeId,
-          person: this.model.mannequin(sitter),
-        },
-      ];
+      const [name, person] =
+        sitter.kind === 'child'
+          ? [`Child, size mark ${sitter.sizeMark}`, this.model.child(sitter.sizeMark)]
+          : [mannequinName(sitter), this.model.mannequin(sitter)];
+      return [{ id: `mannequin:${placeId}`, name, kind: 'mannequin', placeId, person }];
     });
   }
 }

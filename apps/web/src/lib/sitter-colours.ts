@@ -1,7 +1,7 @@
 import { leastWornColour, SITTER_COLOURS, type SetDocument, type SitterColour } from '@settlewright/geometry';
 
 /** What a mannequin is drawn in where the colour is free. */
-const MANNEQUINS: Record<string, SitterColour> = { women: 4, men: 2 };
+const MANNEQUINS: Record<string, SitterColour> = { women: 4, men: 2, children: 3 };
 
 /** The colour of a number, whatever was stored. */
 export const sitterColour = (stored: number): SitterColour =>
@@ -25,7 +25,10 @@ export function sitterColours(
     worn.push(colour);
   };
   const seats = seating.map(({ pieceId, place, sitter }) => {
-    const own = sitter.kind === 'cast' ? ownOf(sitter.castId) : MANNEQUINS[sitter.bodyData];
+    const own =
+      sitter.kind === 'cast'
+        ? ownOf(sitter.castId)
+        : MANNEQUINS[sitter.kind === 'child' ? 'children' : sitter.bodyData];
     return { placeId: `${pieceId}:${place}`, person: sitter.kind === 'cast', own: own && sitterColour(own) };
   });
   // People first: a mannequin has no colour of its own to keep.

@@ -5,7 +5,6 @@ import childrenFile from '@settlewright/seed-data/populations/children.json' wit
 import { furthest } from '../../test/mesh-rays.ts';
 import { selfCrossings, visibleCrossings } from '../../test/self-crossings.ts';
 import { bodyRange, ghostPoses } from './body-range.ts';
-import { childFigure } from './child-figure.ts';
 import { mannequinMesh } from './mesh.ts';
 import { poseMannequin, type MannequinPose } from './pose.ts';
 
@@ -142,19 +141,17 @@ describe('ghosts of what is not known', () => {
 });
 
 describe('children', () => {
-  const children = readChildren(childrenFile);
+  const withChildren = createBodyModel(survey, childrenFile);
 
-  it.each(children.marks)('size mark $mark: its own stature and lower leg, the rest borrowed', (mark) => {
-    const child = childFigure(mark, children.shoeWithinMm, woman);
-    const [low, high] = mark.statureMm;
-    expect(child.means.stature).toBe((low + high) / 2);
-    const [short, long] = mark.poplitealWithShoesMm;
-    expect(child.means.popliteal_height! + children.shoeWithinMm).toBe((short + long) / 2);
-    expect(child.estimated).toEqual(['stature', 'popliteal_height']);
-    const shown = Object.keys(child.means).filter((key) => !child.estimated.includes(key as 'stature'));
-    expect(new Set(child.borrowed)).toEqual(new Set(shown));
-    const pose = poseMannequin({ means: child.means, shoeMm: 25, ...place(mark.seatHeightMm) });
-    expect(mannequinMesh(pose).positions.every(Number.isFinite)).toBe(true);
-    expect(pose.heelGapMm).toBeLessThan(20);
-  });
+  it.each(readChildren(childrenFile).marks)(
+    'of size mark $mark sit on its seat with their feet down',
+    (mark) => {
+      const child = withChildren.child(mark.mark);
+      const means = withChildren.predict(child).means();
+      const pose = poseMannequin({ means, shoeMm: child.shoeMm, ...place(mark.seatHeightMm) });
+      expect(mannequinMesh(pose).positions.every(Number.isFinite)).toBe(true);
+      expect(pose.heelGapMm).toBeLessThan(20);
+      expect(pose.headTopMm).toBeGreaterThan(0.68 * means.stature);
+    },
+  );
 });

@@ -8,9 +8,10 @@ export interface FitEngine {
 }
 
 export async function loadFitEngine(): Promise<FitEngine> {
-  const [summary, ruleBook] = await Promise.all([
+  const [summary, children, ruleBook] = await Promise.all([
     import('@settlewright/seed-data/populations/ansur2.json'),
+    import('@settlewright/seed-data/populations/children.json'),
     fetchRuleBook(),
   ]);
-  return { model: createBodyModel(summary.default), ruleBook };
+  return { model: createBodyModel(summary.default, children.default), ruleBook };
 }

@@ -8,11 +8,12 @@ import {
 } from '@settlewright/geometry';
 import rules from '@settlewright/seed-data/fit-rules.json';
 import summary from '@settlewright/seed-data/populations/ansur2.json';
+import children from '@settlewright/seed-data/populations/children.json';
 import { describe, expect, it } from 'vitest';
 import type { CastMember } from '@/lib/contract.ts';
 import { createPictureMaker, type ServerFitSheet } from './picture.ts';
 
-const engine = { model: createBodyModel(summary), ruleBook: loadRuleBook(rules) };
+const engine = { model: createBodyModel(summary, children), ruleBook: loadRuleBook(rules) };
 const castId = '7f0c1a52-6a1e-4f0e-9d5d-0d6f5a0c7e11';
 const added = addPiece(emptySetDocument(), 'bench');
 const document: SetDocument = {
@@ -70,6 +71,18 @@ describe('what follows from a document', () => {
     expect(whole.undrawn).toEqual(['Hetty Vance']);
     expect(whole.sheet.rows).toHaveLength(1);
     expect(createPictureMaker(engine, [known]).picture(document).undrawn).toEqual([]);
+  });
+
+  it('draws a child for scale, with nothing in doubt to show and a row that is no pass', () => {
+    const sitter = { kind: 'child', sizeMark: 2 } as const;
+    const withChild = { ...document, seating: [{ pieceId: added.pieceId, place: 1, sitter }] };
+    const { bodies, sheet } = createPictureMaker(engine, []).picture(withChild);
+    expect(bodies).toMatchObject([{ name: 'Child, size mark 2', forScale: true, statureMm: 1145 }]);
+    expect(bodies[0]?.belief).toBeUndefined();
+    expect(['notKnown', 'wontFit']).toContain(sheet.rows[0]?.worst);
+    const grownUp = createPictureMaker(engine, [known]).picture(document).bodies[0];
+    expect(grownUp?.forScale).toBe(false);
+    expect(grownUp?.belief).toBeDefined();
   });
 
   it('asks of a verdict the probability that the workshop asks', () => {

@@ -39,8 +39,10 @@ export interface SeatedBody {
   pose: MannequinPose;
   /** What the pose was made from beside the measures. */
   at: PosedAt;
-  /** What is believed of the measures; absent for readers who may not see them. */
+  /** What is believed of the measures; absent for readers who may not see them, and for children. */
   belief?: Body;
+  /** A child: drawn for scale, with measures that are borrowed of grown-ups. */
+  forScale: boolean;
   /** Top of the head, where the leader of a name ends. */
   crownMm: Vec3;
 }
@@ -162,13 +164,18 @@ export function createPictureMaker(
       );
     }
     return new Map(
-      sittersOf(document, cast, engine.model).flatMap(({ placeId, person, noBody }) => {
-        if (noBody) return [];
-        const body = engine.model.predict(person);
-        const { weightKg } = body;
-        const estimated = !person.exact && Object.keys(person.measured).length === 0;
-        return [[placeId, { means: body.means(), shoeMm: person.shoeMm, weightKg, estimated, belief: body }]];
-      }),
+      sittersOf(document, cast, engine.model).flatMap(
+        ({ placeId, person, noBody }): [string, BodyInput][] => {
+          if (noBody) return [];
+          const body = engine.model.predict(person);
+          const { weightKg } = body;
+          const { shoeMm, exact, measured } = person;
+          const known = { means: body.means(), shoeMm, weightKg };
+          if (person.child) return [[placeId, { ...known, estimated: true }]];
+          const estimated = !exact && Object.keys(measured).length === 0;
+          return [[placeId, { ...known, estimated, belief: body }]];
+        },
+      ),
     );
   }
 
@@ -202,6 +209,7 @@ export function createPictureMaker(
           pose,
           at,
           ...(body.belief && { belief: body.belief }),
+          forScale: sitter.kind === 'child',
           crownMm: crownOf(pose, frame),
         },
       ];

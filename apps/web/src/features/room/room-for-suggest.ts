@@ -19,7 +19,7 @@ export interface RoomForSuggest {
   check: (document: SetDocument) => FitSheet;
   /** Takes a document as one named step; absent when it cannot be changed here. */
   replace?: (document: SetDocument, step: string) => void;
-  /** Everyone whose body is known here; nobody for readers without measures. */
+  /** Every grown-up whose body is known here; nobody for readers without measures. */
   sitters: Sitter[];
   /** Places that name somebody who was removed. */
   placesWithoutBody: number;
@@ -36,7 +36,8 @@ export function useRoomForSuggest(): RoomForSuggest {
   return useMemo(() => {
     const colourAt = coloursOf(document, cast);
     const seated = sittersOf(document, cast, engine.model);
-    const sitters = seated.filter(({ noBody }) => !noBody);
+    // A child cannot be served: most of what would be asked is not known.
+    const sitters = seated.filter(({ noBody, person }) => !noBody && !person.child);
     const placeOf = new Map(sheet.rows.map((row) => [row.sitterId, row.placeId]));
     return {
       setId: path.setId,
@@ -48,7 +49,7 @@ export function useRoomForSuggest(): RoomForSuggest {
       check: maker.check,
       ...(canEdit && { replace: take }),
       sitters,
-      placesWithoutBody: seated.length - sitters.length,
+      placesWithoutBody: seated.filter(({ noBody }) => noBody).length,
       ruleBook: engine.ruleBook,
       style,
       colourOf: (sitterId) => colourAt(placeOf.get(sitterId)),

@@ -23,11 +23,21 @@ export function mannequinName(ref: Extract<SitterRef, { kind: 'mannequin' }>): s
   return `${who}, ${ordinal(ref.percentile)} in ${ref.measure.replaceAll('_', ' ')}`;
 }
 
-export const sitterKey = (ref: SitterRef): string =>
-  ref.kind === 'cast' ? ref.castId : `${ref.bodyData}-${ref.measure}-${ref.percentile}`;
+/** Children offered in the list of who may sit: one of each size of school furniture. */
+export const CHILDREN: Extract<SitterRef, { kind: 'child' }>[] = [1, 2, 3, 4, 5, 6].map((sizeMark) => ({
+  kind: 'child',
+  sizeMark,
+}));
+
+export function sitterKey(ref: SitterRef): string {
+  if (ref.kind === 'cast') return ref.castId;
+  if (ref.kind === 'child') return `child-${ref.sizeMark}`;
+  return `${ref.bodyData}-${ref.measure}-${ref.percentile}`;
+}
 
 export function sitterName(ref: SitterRef, cast: readonly CastMember[]): string {
   if (ref.kind === 'mannequin') return mannequinName(ref);
+  if (ref.kind === 'child') return `Child, size mark ${ref.sizeMark}`;
   return cast.find((member) => member.id === ref.castId)?.name ?? 'removed sitter';
 }
 
@@ -64,11 +74,10 @@ const people = new WeakMap<CastMember, KnownPerson | undefined>();
 export function sittersOf(document: SetDocument, cast: readonly CastMember[], model: BodyModel): Sitter[] {
   return document.seating.flatMap(({ pieceId, place, sitter }): Sitter[] => {
     const placeId = `${pieceId}:${place}`;
-    if (sitter.kind === 'mannequin') {
+    if (sitter.kind !== 'cast') {
       const id = `${sitterKey(sitter)}@${placeId}`;
-      return [
-        { id, name: mannequinName(sitter), kind: 'mannequin', placeId, person: model.mannequin(sitter) },
-      ];
+      const person = sitter.kind === 'child' ? model.child(sitter.sizeMark) : model.mannequin(sitter);
+      return [{ id, name: sitterName(sitter, cast), kind: 'mannequin', placeId, person }];
     }
     const member = cast.find((candidate) => candidate.id === sitter.castId);
     if (!member) return [];

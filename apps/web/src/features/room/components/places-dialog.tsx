@@ -3,7 +3,7 @@ import { Combobox, type ComboboxChoice } from '@/components/combobox.tsx';
 import { Dialog } from '@/components/dialog.tsx';
 import type { PieceActions } from '../hooks/use-piece-actions.ts';
 import { useSurroundings } from '../room-context.tsx';
-import { mannequinName, MANNEQUINS, sitterKey } from '../sitters.ts';
+import { CHILDREN, mannequinName, MANNEQUINS, sitterKey, sitterName } from '../sitters.ts';
 
 const NOBODY = 'nobody';
 
@@ -35,9 +35,14 @@ export function PlacesDialog({ piece, document, actions, open, onClose }: Props)
       detail: elsewhere.get(member.id) ?? member.role,
     })),
     ...MANNEQUINS.map((ref) => ({ id: sitterKey(ref), words: mannequinName(ref), detail: 'mannequin' })),
+    ...CHILDREN.map((ref) => ({
+      id: sitterKey(ref),
+      words: sitterName(ref, cast),
+      detail: 'for scale, not checked',
+    })),
   ];
   const refOf = (id: string | null): SitterRef | null =>
-    MANNEQUINS.find((ref) => sitterKey(ref) === id) ??
+    [...MANNEQUINS, ...CHILDREN].find((ref) => sitterKey(ref) === id) ??
     (cast.some((member) => member.id === id) && id ? { kind: 'cast', castId: id } : null);
 
   return (

@@ -1,4 +1,5 @@
 import { jointWarnings, readJointRanges, type JointWarning } from '@settlewright/geometry';
+import children from '@settlewright/seed-data/populations/children.json';
 import jointFile from '@settlewright/seed-data/joint-ranges.json';
 import { SOURCE_MARK_WORDS } from '@settlewright/anthropometry';
 import type { SeatedBody } from '../picture.ts';
@@ -11,6 +12,8 @@ const RANGES = readJointRanges(jointFile);
 
 const sayWarning = ({ joint, motion, side, deg, limitDeg, source }: JointWarning): string =>
   `${side ? `${side} ` : ''}${joint} ${motion} ${Math.round(deg)}°, beyond the ${limitDeg}° that most people manage (${source.cite}; ${SOURCE_MARK_WORDS[source.mark]})`;
+
+const FOR_SCALE = `Drawn for scale, not checked. ${children.warning}`;
 
 const asSentence = (words: string): string => `${words.charAt(0).toUpperCase()}${words.slice(1)}.`;
 
@@ -36,6 +39,7 @@ export function SittingWords({ body }: { body: SeatedBody }) {
   const measuredAs = sayMeasuredAs(choice, style);
   return (
     <div>
+      {body.forScale && <p className="mb-1 font-medium">{FOR_SCALE}</p>}
       <p data-sitting>{asSentence(words.join(', '))}</p>
       {measuredAs !== '' && <p className="mt-1 text-ink-2">{measuredAs}</p>}
       {warnings.map((warning) => (

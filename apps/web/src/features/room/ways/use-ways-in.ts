@@ -32,7 +32,8 @@ export function useWaysIn(document: SetDocument, mayMove: MayMove): WaysFound {
   const comers = useMemo(
     () =>
       sittersOf(document, cast, model).flatMap(({ placeId, name, person, noBody }): NamedComer[] => {
-        if (noBody) return [];
+        // Nothing is said of the way of a child: the breadths it is drawn with are borrowed.
+        if (noBody || person.child) return [];
         const { shoeMm, clothing } = person;
         const measures = model.predict(person).means();
         // A slipped digit in one measure may put another below nothing: such a body would pass everywhere.
