@@ -1,6 +1,6 @@
 import type { SetDocument } from '@settlewright/geometry';
-import { describe, expect, it } from 'vitest';
-import { createRoomStore, shownDocument, undoNames } from './store';
+import { afterEach, beforeEach, describe, expect, it, vi } from 'vitest';
+import { createRoomStore, drawnDocument, REST_MS, settledDocument, shownDocument, undoNames } from './store';
 
 const set = (note: string): SetDocument => ({
   schemaVersion: 1,
@@ -48,5 +48,55 @@ describe('the undo list of a set', () => {
     expect(undoNames(store)).toEqual({ undo: undefined, redo: undefined });
     store.temporal.getState().undo();
     expect(store.getState().document).toEqual(set('theirs'));
+  });
+});
+
+describe('a hand that moves', () => {
+  beforeEach(() => vi.useFakeTimers());
+  afterEach(() => vi.useRealTimers());
+
+  it('is drawn at once and counted when it rests', () => {
+    const first = set('first');
+    const store = createRoomStore(first);
+    store.getState().showMoving(set('way'));
+    vi.advanceTimersByTime(REST_MS - 1);
+    store.getState().showMoving(set('there'));
+    vi.advanceTimersByTime(REST_MS - 1);
+    expect(drawnDocument(store.getState())).toEqual(set('there'));
+    expect(shownDocument(store.getState())).toBe(first);
+    vi.advanceTimersByTime(1);
+    expect(shownDocument(store.getState())).toEqual(set('there'));
+    expect(store.getState().document).toBe(first);
+    store.getState().showMoving(set('on'));
+    expect(shownDocument(store.getState())).toEqual(set('there'));
+    store.getState().showPreview(null);
+    expect(drawnDocument(store.getState())).toBe(first);
+    vi.advanceTimersByTime(REST_MS);
+    expect(shownDocument(store.getState())).toBe(first);
+  });
+
+  it('takes each of several quick steps, and counts all of them once', () => {
+    const first = set('first');
+    const store = createRoomStore(first);
+    const counted = vi.fn();
+    store.getState().commitMoving(set('one'), 'Moved', counted);
+    store.getState().commitMoving(set('two'), 'Moved', counted);
+    expect(store.getState().document).toEqual(set('two'));
+    expect(settledDocument(store.getState())).toBe(first);
+    expect(store.temporal.getState().pastStates).toHaveLength(2);
+    vi.advanceTimersByTime(REST_MS);
+    expect(shownDocument(store.getState())).toEqual(set('two'));
+    expect(store.getState().preview).toBeNull();
+    expect(counted).toHaveBeenCalledExactlyOnceWith(first);
+  });
+
+  it('says nothing of steps that another change came after', () => {
+    const store = createRoomStore(set('first'));
+    const counted = vi.fn();
+    store.getState().commitMoving(set('one'), 'Moved', counted);
+    store.getState().commit(set('two'), 'Seat 18″ to 17″');
+    vi.advanceTimersByTime(REST_MS);
+    expect(counted).not.toHaveBeenCalled();
+    expect(shownDocument(store.getState())).toEqual(set('two'));
   });
 });

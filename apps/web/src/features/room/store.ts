@@ -4,6 +4,8 @@ import { temporal, type TemporalState } from 'zundo';
 import { createStore, useStore, type StoreApi } from 'zustand';
 
 const UNDO_STEPS = 200;
+/** A hand that has been still for so long rests: everything is counted then. */
+export const REST_MS = 150;
 
 interface UndoStep {
   document: SetDocument;
@@ -14,12 +16,24 @@ interface UndoStep {
 export interface RoomState extends UndoStep {
   /** What the hand is doing right now: seen everywhere, kept nowhere until it is committed. */
   preview: SetDocument | null;
+  /** What the hand moves just now, frame by frame: it is drawn, and nothing is counted from it until the hand rests. */
+  moving: SetDocument | null;
+  /** What was counted last, while something moves: numbers are still those of this one. */
+  counted: SetDocument | null;
   /** Cell of the fit sheet whose gap is lit. */
   litCellId: string | null;
   /** Cell of the fit sheet whose slip is open. */
   openCellId: string | null;
   commit: (document: SetDocument, step: string) => void;
+  /**
+   * The same for steps that come fast, as of a key held down: each is one to undo, all are counted when they rest. Then
+   * `atRest` of the last one is told what the set was before the first.
+   */
+  commitMoving: (document: SetDocument, step: string, atRest: (before: SetDocument) => void) => void;
   showPreview: (document: SetDocument | null) => void;
+  showMoving: (document: SetDocument) => void;
+  /** What moves rests, and is counted. */
+  rest: () => void;
   /** Takes a document from the server; forgets the steps, as they belong to another base. */
   load: (document: SetDocument) => void;
   light: (cellId: string | null) => void;
@@ -28,19 +42,45 @@ export interface RoomState extends UndoStep {
 
 export type RoomStore = StoreApi<RoomState> & { temporal: StoreApi<TemporalState<UndoStep>> };
 
+const STILL = { moving: null, counted: null };
+
 /** The one store of a set's page. Documents change by `commit` alone: one call, one undo step. */
 export function createRoomStore(document: SetDocument): RoomStore {
+  let resting: ReturnType<typeof setTimeout> | undefined;
+  let began = document;
+  let atRest: ((before: SetDocument) => void) | undefined;
+  /** Says where a movement began, and that it goes on. */
+  function move(state: RoomState, next: SetDocument): Pick<RoomState, 'moving' | 'counted'> {
+    if (!state.moving) began = state.document;
+    atRest = undefined;
+    clearTimeout(resting);
+    resting = setTimeout(() => state.rest(), REST_MS);
+    return { moving: next, counted: shownDocument(state) };
+  }
   const store = createStore<RoomState>()(
     temporal(
-      (set) => ({
+      (set, get) => ({
         document,
         step: '',
         preview: null,
+        ...STILL,
         litCellId: null,
         openCellId: null,
-        commit: (next, step) => set({ document: next, step, preview: null }),
-        showPreview: (preview) => set({ preview }),
-        load: (next) => set({ document: next, step: '', preview: null }),
+        commit: (next, step) => set({ document: next, step, preview: null, ...STILL }),
+        commitMoving: (next, step, then) => {
+          set({ document: next, step, preview: null, ...move(get(), next) });
+          atRest = then;
+        },
+        showPreview: (preview) => set({ preview, ...STILL }),
+        showMoving: (moving) => set(move(get(), moving)),
+        rest: () => {
+          clearTimeout(resting);
+          const { moving } = get();
+          if (!moving) return;
+          set({ preview: moving === get().document ? null : moving, ...STILL });
+          atRest?.(began);
+        },
+        load: (next) => set({ document: next, step: '', preview: null, ...STILL }),
         light: (litCellId) => set({ litCellId }),
         openCell: (openCellId) => set({ openCellId }),
       }),
@@ -74,8 +114,19 @@ export function useRoom<T>(select: (state: RoomState) => T): T {
   return useStore(useRoomStore(), select);
 }
 
-/** The document that is on the screen: the one being typed or dragged, else the committed one. */
-export const shownDocument = (state: RoomState): SetDocument => state.preview ?? state.document;
+/** The document that numbers are told of: the one being typed or dragged when it is counted, else the committed one. */
+export const shownDocument = (state: RoomState): SetDocument =>
+  state.counted ?? state.preview ?? state.document;
+
+/** The document that is drawn: the one in the hand, though nothing has been counted from it yet. */
+export const drawnDocument = (state: RoomState): SetDocument => state.moving ?? shownDocument(state);
+
+/** The committed document, as far as it is counted. */
+export const settledDocument = (state: RoomState): SetDocument =>
+  state.moving === state.document ? shownDocument(state) : state.document;
+
+/** True while something moves and what follows from it is not yet counted. */
+export const useIsMoving = (): boolean => useRoom(({ moving }) => moving !== null);
 
 export interface UndoNames {
   undo: string | undefined;

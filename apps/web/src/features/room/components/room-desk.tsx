@@ -20,6 +20,7 @@ import { PosturePanel } from '../posture/posture-panel.tsx';
 import { MeasurePanel } from '../tape-tool/measure-panel.tsx';
 import { WaysPanel } from '../ways/ways-panel.tsx';
 import { ChosenPieces } from './chosen-pieces.tsx';
+import { Counted } from './counted.tsx';
 import { ConflictScreen } from './conflict-screen.tsx';
 import { DraftRefused } from './draft-refused.tsx';
 import { EmptySet } from './empty-set.tsx';
@@ -118,9 +119,11 @@ export function RoomDesk({ lastRevision, foot, aboutPiece }: Props) {
                       onCopy={clipboard.copy}
                     />
                   ) : piece ? (
-                    <div className="pb-4">
-                      <SpecSentence key={piece.id} piece={piece} />
-                    </div>
+                    <Counted>
+                      <div className="pb-4">
+                        <SpecSentence key={piece.id} piece={piece} />
+                      </div>
+                    </Counted>
                   ) : (
                     <p className="ruled pt-3 pb-5 text-lg text-ink-2">
                       Select a piece in the drawing or in the list to read and change its sizes.
@@ -129,34 +132,38 @@ export function RoomDesk({ lastRevision, foot, aboutPiece }: Props) {
               </>
             )}
           </div>
-          <aside
-            aria-label="Pieces, plan and notes"
-            className="flex min-h-0 flex-col gap-5 pb-6 max-tablet:order-2 max-tablet:pt-6 tablet:order-1 tablet:overflow-x-hidden tablet:overflow-y-auto tablet:pr-1 tablet:[scrollbar-gutter:stable] tablet:[scrollbar-width:thin]"
-          >
-            <PiecesPanel
-              document={document}
-              selectedPieceId={address.pieceId}
-              onSelect={address.select}
-              actions={actions}
-              several={mayChange ? { choosing, clipboard } : undefined}
-              aboutPiece={aboutPiece}
-            />
-            {!empty && <KeyPlan picture={picture} address={address} />}
-            {!empty && !clientView && <PosturePanel />}
-            {!empty && !clientView && <MeasurePanel />}
-            {!empty && !clientView && <WaysPanel />}
-            <KnownDifferences document={document} onReplace={actions.replace} />
-            {mayChange && !empty && <IssueRevision sheet={picture.sheet} lastLetter={lastRevision?.letter} />}
-            {!clientView && <NotesPanel piece={piece} pieces={document.pieces} parts={picture.parts} />}
-            <p className="flex flex-wrap gap-x-5">
-              {!empty && <SaveDrawingButton />}
-              <Button look="word" onClick={() => setHelpOpen(true)}>
-                Keys
-              </Button>
-            </p>
-          </aside>
+          <Counted>
+            <aside
+              aria-label="Pieces, plan and notes"
+              className="flex min-h-0 flex-col gap-5 pb-6 max-tablet:order-2 max-tablet:pt-6 tablet:order-1 tablet:overflow-x-hidden tablet:overflow-y-auto tablet:pr-1 tablet:[scrollbar-gutter:stable] tablet:[scrollbar-width:thin]"
+            >
+              <PiecesPanel
+                document={document}
+                selectedPieceId={address.pieceId}
+                onSelect={address.select}
+                actions={actions}
+                several={mayChange ? { choosing, clipboard } : undefined}
+                aboutPiece={aboutPiece}
+              />
+              {!empty && <KeyPlan picture={picture} address={address} />}
+              {!empty && !clientView && <PosturePanel />}
+              {!empty && !clientView && <MeasurePanel />}
+              {!empty && !clientView && <WaysPanel />}
+              <KnownDifferences document={document} onReplace={actions.replace} />
+              {mayChange && !empty && (
+                <IssueRevision sheet={picture.sheet} lastLetter={lastRevision?.letter} />
+              )}
+              {!clientView && <NotesPanel piece={piece} pieces={document.pieces} parts={picture.parts} />}
+              <p className="flex flex-wrap gap-x-5">
+                {!empty && <SaveDrawingButton />}
+                <Button look="word" onClick={() => setHelpOpen(true)}>
+                  Keys
+                </Button>
+              </p>
+            </aside>
+          </Counted>
         </div>
-        {!clientView && foot}
+        {!clientView && <Counted>{foot}</Counted>}
         <KeysDialog open={helpOpen} onClose={() => setHelpOpen(false)} />
       </div>
     </RoomContext>

@@ -20,7 +20,7 @@ import { useSurroundings } from '../room-context.tsx';
 import { isBehind, isBodyLeft, isToScale } from '../scene/views.ts';
 import { SectionBar } from '../section/section-bar.tsx';
 import { SectionOnScene } from '../section/section-on-scene.tsx';
-import { useRoom } from '../store.ts';
+import { settledDocument, useIsMoving, useRoom } from '../store.ts';
 import { LensMask } from '../views/lens-mask.tsx';
 import { LensOnPlan } from '../views/lens-on-plan.tsx';
 import { useOfferPresentView, useSeen } from '../views/use-seen.ts';
@@ -31,6 +31,7 @@ import { linesOnScene, useMeasures, useMeasuringScene } from '../tape-tool/use-m
 import { useTapeHand } from '../tape-tool/use-tape-hand.ts';
 import { GapsOnScene } from '../touching/gaps-on-scene.tsx';
 import { WayOnScene } from '../ways/way-on-scene.tsx';
+import { DrawnScene, useStill } from './drawn-scene.tsx';
 import { EyeMark } from './eye-mark.tsx';
 import { SceneErrorBoundary } from './scene-error-boundary.tsx';
 import { ScaleBar } from './scale-bar.tsx';
@@ -47,7 +48,6 @@ const FADE = {
 const NOTHING: readonly string[] = [];
 const NOBODY: RoomPicture['bodies'] = [];
 
-const SceneCanvas = lazy(() => import('../scene/scene-canvas.tsx'));
 const HandleLayer = lazy(() => import('../handles/handle-layer.tsx'));
 
 interface Props {
@@ -69,10 +69,11 @@ export function SceneStage({ picture, piece, address, actions, several, onOpenCe
   const readOut = useRef<HTMLDivElement>(null);
   const about = useId();
   const { clientView } = address;
+  const isMoving = useIsMoving();
   const seen = useSeen(picture.document, address);
   const { letter } = seen;
   const [showBodies, showTapes] = [seen.bodies.shown, seen.tapes.shown];
-  const settled = maker.picture(useRoom((state) => state.document));
+  const settled = maker.picture(useRoom(settledDocument));
   const view = useView(settled, letter, address.pieceId, sheet, seen);
   useOfferPresentView(seen, view, clientView);
   const title = viewTitle(seen, style);
@@ -96,7 +97,7 @@ export function SceneStage({ picture, piece, address, actions, several, onOpenCe
     [picture, tapedId],
   );
   const shown =
-    showTapes && !clientView
+    showTapes && !clientView && !isMoving
       ? tapesAtRest(tapes, picture.sheet, tapedId, lit, view.narrow ? 2 : 5).filter(
           // A gap under somebody who was cut away would hang on nothing.
           ({ kind, fromMm }) => kind !== 'gap' || isBehind(fromMm, view.cut),
@@ -105,12 +106,13 @@ export function SceneStage({ picture, piece, address, actions, several, onOpenCe
   const showDoubt = useDoubt((state) => state.shown);
   const inDoubt = showBodies && detail === 'full' && !clientView ? picture.bodies : NOBODY;
   useDoubtKey(inDoubt);
-  const bodies = showBodies ? picture.bodies.filter((body) => isBodyLeft(body.crownMm, view.cut)) : [];
+  const seated = showBodies ? picture.bodies.filter((body) => isBodyLeft(body.crownMm, view.cut)) : [];
+  const bodies = useStill(seated, picture);
 
   const measuring = useMeasuringScene(picture);
   const measures = useMeasures(picture, measuring);
   const tapeHand = useTapeHand({ picture, scene: measuring, view, letter, showBodies, readOut });
-  const measured = showTapes && !clientView ? linesOnScene(measures) : [];
+  const measured = showTapes && !clientView && !isMoving ? linesOnScene(measures) : [];
 
   const keys = useStageKeys({
     piece,
@@ -153,7 +155,7 @@ export function SceneStage({ picture, piece, address, actions, several, onOpenCe
         tabIndex={0}
         data-scene={letter}
         data-scene-pieces={picture.document.pieces.length}
-        data-scene-sitters={bodies.length}
+        data-scene-sitters={seated.length}
         data-scene-parts={picture.parts.length}
         onKeyDown={keys}
         onWheel={(event) => {
@@ -165,7 +167,7 @@ export function SceneStage({ picture, piece, address, actions, several, onOpenCe
         <SceneErrorBoundary>
           <div className="absolute inset-0" style={FADE}>
             <Suspense fallback={<LoadingLine words="Drawing the set" />}>
-              <SceneCanvas
+              <DrawnScene
                 picture={picture}
                 controller={view.controller}
                 letter={letter}
@@ -204,8 +206,10 @@ export function SceneStage({ picture, piece, address, actions, several, onOpenCe
             />
           </Suspense>
         )}
-        <WayOnScene controller={view.controller} style={style} />
-        {!clientView && <GapsOnScene controller={view.controller} cut={view.cut} style={style} />}
+        {!isMoving && <WayOnScene controller={view.controller} style={style} />}
+        {!clientView && !isMoving && (
+          <GapsOnScene controller={view.controller} cut={view.cut} style={style} />
+        )}
         <SectionOnScene picture={picture} controller={view.controller} />
         {view.lensBox && <LensMask box={view.lensBox} />}
         {letter === 'D' && seen.lens && (

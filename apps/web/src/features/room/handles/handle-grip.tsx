@@ -1,5 +1,5 @@
-import type { Handle, Piece } from '@settlewright/geometry';
-import { useLayoutEffect, useRef, useState, type KeyboardEvent } from 'react';
+import type { Handle, Piece, RoomFor, SnappedPull } from '@settlewright/geometry';
+import { memo, useLayoutEffect, useRef, useState, type KeyboardEvent } from 'react';
 import { announce } from '@/lib/announce.ts';
 import { useChangeNumber } from '../hooks/use-change-number.ts';
 import { useNumberEdit } from '../hooks/use-number-edit.ts';
@@ -24,7 +24,7 @@ const MORE = new Set(['ArrowUp', 'ArrowRight']);
 const LESS = new Set(['ArrowDown', 'ArrowLeft']);
 
 /** One handle: a button to pull, to step with the arrows, or to type at. */
-export function HandleGrip({ piece, handle, controller, onHand }: Props) {
+export const HandleGrip = memo(function HandleGrip({ piece, handle, controller, onHand }: Props) {
   const { style } = useSurroundings();
   const number = numberOf(handle);
   const change = useChangeNumber(handle.pieceId, number, handle);
@@ -32,20 +32,30 @@ export function HandleGrip({ piece, handle, controller, onHand }: Props) {
   const flag = useRef<HTMLDivElement>(null);
   const [back, setBack] = useState(false);
   const edit = useNumberEdit(number, style, change, { left: () => setBack(true) });
-  const pull = usePull({
-    handle,
-    controller,
-    change,
-    onPull: (snapped) => {
-      onHand(snapped && handle.id);
-      const element = flag.current;
-      if (!element) return;
-      element.toggleAttribute('hidden', snapped === undefined);
-      if (!snapped) return;
-      const beyond = beyondRoom(number, snapped.value, change.room(), style);
-      element.replaceChildren(readOutPull(number, snapped, beyond, piece, style));
-    },
-  });
+  /** How far there is room takes long to find: it is sought on the press, and no frame waits for it. */
+  const room = useRef<RoomFor>(undefined);
+  const pulled = useRef<SnappedPull>(undefined);
+
+  function seekRoom() {
+    room.current = undefined;
+    setTimeout(() => {
+      room.current = change.room();
+      if (pulled.current) say(pulled.current);
+    });
+  }
+
+  function say(snapped: SnappedPull | undefined) {
+    pulled.current = snapped;
+    onHand(snapped && handle.id);
+    const element = flag.current;
+    if (!element) return;
+    element.toggleAttribute('hidden', snapped === undefined);
+    if (!snapped) return;
+    const beyond = room.current && beyondRoom(number, snapped.value, room.current, style);
+    element.replaceChildren(readOutPull(number, snapped, beyond, piece, style));
+  }
+
+  const pull = usePull({ handle, controller, change, onTake: seekRoom, onPull: say });
 
   useLayoutEffect(() => {
     if (back && !edit.editing) button.current?.focus({ preventScroll: true });
@@ -59,7 +69,7 @@ export function HandleGrip({ piece, handle, controller, onHand }: Props) {
 
   function step(event: KeyboardEvent, way: 1 | -1) {
     const size = event.shiftKey ? 8 : event.altKey ? 0.5 : 1;
-    const refused = change.commit(stepped(number, style, handle.value, way * size));
+    const refused = change.step(stepped(number, style, handle.value, way * size));
     if (refused !== undefined) announce(refused);
   }
 
@@ -118,4 +128,4 @@ export function HandleGrip({ piece, handle, controller, onHand }: Props) {
       )}
     </div>
   );
-}
+});

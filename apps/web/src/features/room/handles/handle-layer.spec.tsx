@@ -104,7 +104,7 @@ describe('a handle of the selected piece', () => {
     open();
     pull(right(), 50);
     expect(bench().lengthMm).toBe(44 * INCH);
-    const preview = store.getState().preview?.pieces[0] as PieceOf<'bench'>;
+    const preview = store.getState().moving?.pieces[0] as PieceOf<'bench'>;
     const grown = preview.lengthMm - 44 * INCH;
     expect(Math.abs(grown - 100)).toBeLessThanOrEqual(16);
     release(right());
@@ -119,7 +119,7 @@ describe('a handle of the selected piece', () => {
   it('keeps to half steps alone with Alt', () => {
     open();
     pull(right(), 51.3, { altKey: true });
-    const preview = store.getState().preview?.pieces[0] as PieceOf<'bench'>;
+    const preview = store.getState().moving?.pieces[0] as PieceOf<'bench'>;
     const half = INCH / 16;
     expect(Math.abs(preview.lengthMm - 44 * INCH - 102.6)).toBeLessThanOrEqual(half / 2 + 1e-6);
     release(right());
@@ -139,6 +139,7 @@ describe('a handle of the selected piece', () => {
     pull(right(), 50);
     await user.keyboard('{Escape}');
     release(right());
+    expect(store.getState().moving).toBeNull();
     expect(store.getState().preview).toBeNull();
     expect(store.getState().document).toBe(before);
   });

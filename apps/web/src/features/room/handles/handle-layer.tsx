@@ -2,12 +2,12 @@ import { pieceHandles, type Piece } from '@settlewright/geometry';
 import { useCallback, useEffect, useLayoutEffect, useMemo, useRef } from 'react';
 import type { ViewController } from '../scene/view-controller.ts';
 import { isBehind, type Cut } from '../scene/views.ts';
-import { useRoom } from '../store.ts';
+import { drawnDocument, useRoom } from '../store.ts';
 import { HandleGrip } from './handle-grip.tsx';
 import { placeHandles, type Box } from './handle-layout.ts';
 
 interface Props {
-  /** The selected piece as it is shown just now. */
+  /** The selected piece. */
   piece: Piece;
   controller: ViewController;
   cut: Cut | undefined;
@@ -24,7 +24,11 @@ export default function HandleLayer({ piece, controller, cut, narrow }: Props) {
     () => (committed ? pieceHandles(committed).filter(({ main }) => main || !narrow) : []),
     [committed, narrow],
   );
-  const shown = useMemo(() => pieceHandles(piece).filter(({ atMm }) => isBehind(atMm, cut)), [piece, cut]);
+  const drawn = useRoom((state) => drawnDocument(state).pieces.find(({ id }) => id === piece.id));
+  const shown = useMemo(
+    () => (drawn ? pieceHandles(drawn).filter(({ atMm }) => isBehind(atMm, cut)) : []),
+    [drawn, cut],
+  );
 
   const layOut = useCallback(() => {
     const frame = controller.frame();

@@ -44,11 +44,13 @@ export function usePull(options: {
   /** Of the committed set. */
   handle: Handle;
   controller: ViewController;
-  change: ChangeNumber;
+  change: Pick<ChangeNumber, 'preview' | 'drag' | 'commit'>;
+  /** The handle is pressed, and may be pulled. */
+  onTake: () => void;
   /** Says the number while it is pulled; undefined when it is let go. */
   onPull: (snapped: SnappedPull | undefined) => void;
 }): Pulling {
-  const { handle, controller, change, onPull } = options;
+  const { handle, controller, change, onTake, onPull } = options;
   const store = useRoomStore();
   const { style } = useSurroundings();
   const pull = useRef<Pull | null>(null);
@@ -86,6 +88,7 @@ export function usePull(options: {
     event.currentTarget.focus({ preventScroll: true });
     const { pointerId, clientX: startX, clientY: startY } = event;
     pull.current = { pointerId, startX, startY, from, moving: false, snapped: { value: handle.value } };
+    onTake();
   }
 
   function onPointerMove(event: PointerEvent<HTMLElement>) {
@@ -108,7 +111,7 @@ export function usePull(options: {
     const { snapped } = hand;
     cancelAnimationFrame(request.current);
     request.current = requestAnimationFrame(() => {
-      change.preview(snapped.value);
+      change.drag(snapped.value);
       onPull(snapped);
     });
   }
@@ -132,6 +135,12 @@ export function usePull(options: {
     announce(refused);
   }
 
+  /** What is shown stays, and is counted. */
+  function hold() {
+    stop();
+    store.getState().rest();
+  }
+
   function cancel() {
     if (!pull.current) return;
     stop();
@@ -141,7 +150,7 @@ export function usePull(options: {
   return {
     isPulling: () => pull.current?.moving === true,
     cancel,
-    hold: stop,
+    hold,
     tookPress: () => {
       const took = pulled.current;
       pulled.current = false;

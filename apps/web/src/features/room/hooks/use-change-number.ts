@@ -18,8 +18,12 @@ import { changedVerdicts } from '../verdict-words.ts';
 export interface ChangeNumber {
   /** Shows the set with another value, without a step. */
   preview: (value: number | null) => void;
+  /** Draws the set with another value while it is dragged; it is counted when the hand rests. */
+  drag: (value: number) => void;
   /** Takes the value as one named step; returns the reason when it cannot be. */
   commit: (value: number) => string | undefined;
+  /** The same where steps come fast, as of a key held down: they are counted when they rest. */
+  step: (value: number) => string | undefined;
   /** How far the value may go before the piece meets another. */
   room: () => RoomFor;
 }
@@ -51,8 +55,17 @@ export function useChangeNumber(pieceId: string, parameter: NumberParameter, han
     [store, changed],
   );
 
-  const commit = useCallback(
+  const drag = useCallback(
     (value: number) => {
+      const { document, showMoving } = store.getState();
+      const next = changed(document, value);
+      if (next.ok) showMoving(next.value);
+    },
+    [store, changed],
+  );
+
+  const take = useCallback(
+    (value: number, fast: boolean) => {
       const { document, showPreview } = store.getState();
       const piece = document.pieces.find((candidate) => candidate.id === pieceId);
       const before = piece && parametersOf(piece).find((candidate) => candidate.key === key);
@@ -69,15 +82,24 @@ export function useChangeNumber(pieceId: string, parameter: NumberParameter, han
       function takeStep(old: SetDocument, next: SetDocument, was: NumberParameter, piece: Piece) {
         const label = was.label.charAt(0).toLowerCase() + was.label.slice(1);
         const [from, to] = [showNumber(was, style), showNumber(was, style, value)];
-        store.getState().commit(next, `${piece.mark} ${label} ${from} to ${to}`);
-        const verdicts = changedVerdicts(maker.check(old), maker.check(next), engine.ruleBook);
-        const beyond = beyondRoom(was, value, roomOf(old, pieceId, key, handle), style);
-        const words = [
-          `${was.label} ${sayNumber(was, style, value)}`,
-          ...(beyond ? [sayLimit(was, beyond, piece, style)] : []),
-          ...verdicts,
-        ];
-        announce(`${words.join('. ')}.`);
+        const step = `${piece.mark} ${label} ${from} to ${to}`;
+        const said = `${was.label} ${sayNumber(was, style, value)}`;
+        const follows = (before: SetDocument) => {
+          const verdicts = changedVerdicts(maker.check(before), maker.check(next), engine.ruleBook);
+          const beyond = beyondRoom(was, value, roomOf(before, pieceId, key, handle), style);
+          return [...(beyond ? [sayLimit(was, beyond, piece, style)] : []), ...verdicts];
+        };
+        const sayAll = (more: readonly string[]) => announce(`${[said, ...more].join('. ')}.`);
+        if (!fast) {
+          store.getState().commit(next, step);
+          sayAll(follows(old));
+          return;
+        }
+        store.getState().commitMoving(next, step, (before) => {
+          const more = follows(before);
+          if (more.length > 0) sayAll(more);
+        });
+        sayAll([]);
       }
     },
     [store, pieceId, key, handle, changed, maker, engine, style],
@@ -88,5 +110,7 @@ export function useChangeNumber(pieceId: string, parameter: NumberParameter, han
     [store, pieceId, key, handle],
   );
 
-  return { preview, commit, room };
+  const commit = useCallback((value: number) => take(value, false), [take]);
+  const step = useCallback((value: number) => take(value, true), [take]);
+  return { preview, drag, commit, step, room };
 }

@@ -18,7 +18,7 @@ import { toast } from 'sonner';
 import { joinWords } from '../choosing-words.ts';
 import { useSurroundings } from '../room-context.tsx';
 import { useRoomStore } from '../store.ts';
-import { useTakeStep } from './use-take-step.ts';
+import { useTakeMovingStep, useTakeStep, type TakeStep } from './use-take-step.ts';
 
 const EDGE_WORDS: Record<AlignEdge, string> = {
   left: 'on the left',
@@ -84,22 +84,28 @@ export function useGroupActions(choose: (ids: readonly string[]) => void): Group
   const store = useRoomStore();
   const { style } = useSurroundings();
   const take = useTakeStep();
+  const takeMoving = useTakeMovingStep();
 
   return useMemo(() => {
     const now = () => store.getState().document;
     // What changes nothing is no step; it is said where it can be seen, and read out from there.
-    const arrange = (next: SetDocument, step: string, already: string, aside?: string) =>
-      next.pieces.every((piece, n) => piece === now().pieces[n]) ? toast(already) : take(next, step, aside);
+    const arrangeBy =
+      (taking: TakeStep) => (next: SetDocument, step: string, already: string, aside?: string) =>
+        next.pieces.every((piece, n) => piece === now().pieces[n])
+          ? toast(already)
+          : taking(next, step, aside);
+    const arrange = arrangeBy(take);
+    const carry = arrangeBy(takeMoving);
     return {
       nudge: (pieces, stepsX, stepsZ) => {
         const step = lengthStep(style);
         const next = movePieces(now(), idsOf(pieces), { xMm: stepsX * step, zMm: stepsZ * step });
         const by = formatLength(Math.hypot(stepsX, stepsZ) * step, style);
         const locked = sayLocked(pieces);
-        arrange(next, `Move ${pieces.length} pieces ${by}`, `${locked}.`, locked);
+        carry(next, `Move ${pieces.length} pieces ${by}`, `${locked}.`, locked);
       },
       turn: (pieces, byDeg) =>
-        arrange(
+        carry(
           turnPieces(now(), idsOf(pieces), byDeg),
           `Turn ${pieces.length} pieces ${Math.abs(byDeg)}° ${byDeg > 0 ? 'left' : 'right'}`,
           `${sayLocked(pieces)}.`,
@@ -140,5 +146,5 @@ export function useGroupActions(choose: (ids: readonly string[]) => void): Group
           sayLocked(pieces.slice(1)),
         ),
     };
-  }, [store, style, take, choose]);
+  }, [store, style, take, takeMoving, choose]);
 }

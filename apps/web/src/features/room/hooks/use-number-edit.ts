@@ -36,7 +36,7 @@ const stepsOf = (event: KeyboardEvent): number => {
 export function useNumberEdit(
   parameter: NumberParameter,
   style: LengthStyle,
-  change: Omit<ChangeNumber, 'room'> & Partial<ChangeNumber>,
+  change: Pick<ChangeNumber, 'preview' | 'commit'> & Partial<ChangeNumber>,
   after: { committed?: () => void; left?: () => void } = {},
 ): NumberEdit {
   const [typed, setTyped] = useState<Typed | null>(null);

@@ -4,6 +4,7 @@ import {
   formatLength,
   lengthStep,
   movePiece,
+  movePieces,
   removePiece,
   seatSitter,
   type Piece,
@@ -17,7 +18,7 @@ import { useSurroundings } from '../room-context.tsx';
 import { sitterName } from '../sitters.ts';
 import { useRoomStore } from '../store.ts';
 import { sayFlag, withFlag, type PieceFlag } from './use-group-actions.ts';
-import { useTakeStep } from './use-take-step.ts';
+import { useTakeMovingStep, useTakeStep } from './use-take-step.ts';
 import { shortName } from '@/lib/short-name.ts';
 
 export const KIND_WORDS: Record<PieceKind, string> = {
@@ -48,6 +49,7 @@ export function usePieceActions(select: (pieceId: string | undefined) => void): 
   const store = useRoomStore();
   const { style, cast } = useSurroundings();
   const take = useTakeStep();
+  const takeMoving = useTakeMovingStep();
 
   return useMemo(() => {
     const now = () => store.getState().document;
@@ -81,14 +83,17 @@ export function usePieceActions(select: (pieceId: string | undefined) => void): 
       nudge: (piece, stepsX, stepsZ) => {
         if (!mayChange(piece)) return;
         const step = lengthStep(style);
-        const to = { xMm: piece.at.xMm + stepsX * step, zMm: piece.at.zMm + stepsZ * step };
+        const way = { xMm: stepsX * step, zMm: stepsZ * step };
         const by = formatLength(Math.hypot(stepsX, stepsZ) * step, style);
-        take(movePiece(now(), piece.id, { ...piece.at, ...to }), `${piece.mark} moved ${by}`);
+        takeMoving(movePieces(now(), [piece.id], way), `${piece.mark} moved ${by}`);
       },
       turn: (piece, byDeg) => {
         if (!mayChange(piece)) return;
-        const turnDeg = piece.at.turnDeg + byDeg;
-        take(movePiece(now(), piece.id, { ...piece.at, turnDeg }), `${piece.mark} turned ${byDeg}°`);
+        const { at } = now().pieces.find(({ id }) => id === piece.id) ?? piece;
+        takeMoving(
+          movePiece(now(), piece.id, { turnDeg: at.turnDeg + byDeg }),
+          `${piece.mark} turned ${byDeg}°`,
+        );
       },
       place: (piece, at) => {
         if (mayChange(piece)) take(movePiece(now(), piece.id, { ...piece.at, ...at }), `${piece.mark} moved`);
@@ -111,5 +116,5 @@ export function usePieceActions(select: (pieceId: string | undefined) => void): 
       },
       replace: take,
     };
-  }, [store, style, cast, take, select]);
+  }, [store, style, cast, take, takeMoving, select]);
 }

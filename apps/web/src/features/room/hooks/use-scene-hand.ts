@@ -166,7 +166,9 @@ export function useSceneHand(options: {
       hand.snapped = snapped;
       showReadOut(readOutMove(piece.at, snapped.at, snapped.snappedTo, style), x, y);
       cancelAnimationFrame(request.current);
-      request.current = requestAnimationFrame(() => store.getState().showPreview(wanted.current));
+      request.current = requestAnimationFrame(() => {
+        if (wanted.current) store.getState().showMoving(wanted.current);
+      });
     } else if (letter === 'E') {
       view.turnBy(-(x - hand.lastX) * 0.008, (y - hand.lastY) * 0.006);
     } else {

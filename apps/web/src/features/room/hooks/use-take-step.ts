@@ -17,8 +17,29 @@ export function useTakeStep(): TakeStep {
       if (next === document) return;
       commit(next, step);
       const verdicts = changedVerdicts(maker.check(document), maker.check(next), engine.ruleBook);
-      announce(`${[step, ...(aside ? [aside] : []), ...verdicts].join('. ')}.`);
+      announce(sentences(step, aside, ...verdicts));
     },
     [store, maker, engine],
   );
 }
+
+/** The same for steps that come fast, as of a key held down: the verdicts that changed are said when they rest. */
+export function useTakeMovingStep(): TakeStep {
+  const store = useRoomStore();
+  const { maker, engine } = useSurroundings();
+  return useCallback(
+    (next, step, aside) => {
+      const { document, commitMoving } = store.getState();
+      if (next === document) return;
+      commitMoving(next, step, (before) => {
+        const verdicts = changedVerdicts(maker.check(before), maker.check(next), engine.ruleBook);
+        if (verdicts.length > 0) announce(sentences(step, aside, ...verdicts));
+      });
+      announce(sentences(step, aside));
+    },
+    [store, maker, engine],
+  );
+}
+
+const sentences = (...words: (string | undefined)[]): string =>
+  `${words.filter((word) => word !== undefined).join('. ')}.`;

@@ -1,10 +1,12 @@
 import { MANNEQUIN_TAGS, type MannequinDetail, type MannequinMesh } from '@settlewright/geometry';
-import { useEffect, useMemo } from 'react';
+import { memo, useEffect, useMemo } from 'react';
 import { BufferAttribute, BufferGeometry } from 'three';
 import { useBodyMesh } from '../bodies/use-body-mesh.ts';
-import type { RoomPicture, SeatedBody } from '../picture.ts';
+import type { DrawnPicture } from '../drawn-picture.ts';
+import type { SeatedBody } from '../picture.ts';
 import { linesOf } from './ink-lines.ts';
 import type { Palette } from './palette.ts';
+import { setDown } from './piece-solids.tsx';
 import { createBodyMaterial, type SceneMaterials, type SharedUniforms } from './shaders.ts';
 
 /** Tones of the body shader: suit, paler head and hands, dark shoes. */
@@ -54,17 +56,23 @@ function Skin({ mesh, body, detail, palette, shared, materials }: FigureProps & 
   );
 }
 
-function Figure(props: FigureProps) {
+/** Drawn again only for another body: a piece in the hand leaves them as they are. */
+const Figure = memo(function Figure(props: FigureProps) {
   const mesh = useBodyMesh(props.body.pose, props.detail);
   return mesh && <Skin mesh={mesh} {...props} />;
-}
+});
 
 interface Props extends Omit<FigureProps, 'body' | 'detail'> {
-  picture: RoomPicture;
+  picture: DrawnPicture;
 }
 
 /** Lay figures in a plain suit: two draw calls each while they are few, one in a large company. */
 export function BodyFigures({ picture, ...rest }: Props) {
   const detail = picture.bodies.length > FINE_SITTERS ? 'far' : 'near';
-  return picture.bodies.map((body) => <Figure key={body.placeId} body={body} detail={detail} {...rest} />);
+  const { carried } = picture;
+  return picture.bodies.map((body) => (
+    <group key={body.placeId} {...setDown(carried?.before.has(body.pieceId) ? carried : undefined)}>
+      <Figure body={body} detail={detail} {...rest} />
+    </group>
+  ));
 }

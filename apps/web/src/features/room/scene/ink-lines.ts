@@ -1,7 +1,7 @@
 import { BufferAttribute, InstancedBufferAttribute, InstancedBufferGeometry, Sphere, Vector3 } from 'three';
 
 /** Straight edges of constant width on the screen: two triangles a segment, drawn in one call. */
-export function linesOf(edges: readonly number[], weights: readonly number[]): InstancedBufferGeometry {
+export function linesOf(edges: ArrayLike<number>, weights: ArrayLike<number>): InstancedBufferGeometry {
   const geometry = new InstancedBufferGeometry();
   const corners = new Float32Array([-1, 0, 0, 1, 0, 0, 1, 1, 0, -1, 1, 0]);
   geometry.setAttribute('position', new BufferAttribute(corners, 3));

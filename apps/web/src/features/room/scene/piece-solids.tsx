@@ -1,11 +1,13 @@
-import { useEffect, useMemo } from 'react';
+import { derivePieceParts, type Piece } from '@settlewright/geometry';
+import { memo, useEffect, useMemo } from 'react';
 import type { BufferGeometry } from 'three';
-import type { RoomPicture } from '../picture';
+import type { Carried, DrawnPicture } from '../drawn-picture';
 import { linesOf } from './ink-lines';
-import type { SceneMaterials } from './shaders';
+import { joinSolids, solidsOf, type PackedSolids } from './packed-solids';
 import { printsByPiece } from './seat-print';
-import { mergeParts, surfaceOf } from './solids';
-import { visibleParts } from './visible-parts';
+import type { SceneMaterials } from './shaders';
+import { surfaceOf } from './solids';
+import { visiblePieces } from './visible-parts';
 import type { SceneView } from './views';
 
 /** Frees what a memo made when it is made again. */
@@ -13,8 +15,58 @@ export function useDispose(geometries: Record<string, BufferGeometry>) {
   useEffect(() => () => Object.values(geometries).forEach((geometry) => geometry.dispose()), [geometries]);
 }
 
+/** Where a group of the scene is set down when it is carried. */
+export const setDown = (carried: Carried | undefined) => ({
+  position: [carried?.xMm ?? 0, 0, carried?.zMm ?? 0] as const,
+  'rotation-y': carried?.turnRad ?? 0,
+});
+
+interface SolidsProps {
+  pieces: readonly PackedSolids[];
+  letter: SceneView;
+  chosen: boolean;
+  materials: SceneMaterials;
+}
+
+/** Several pieces in a handful of draw calls; made again only when one of them is another. */
+const Solids = memo(
+  function Solids({ pieces, letter, chosen, materials }: SolidsProps) {
+    const made = useMemo(() => {
+      const all = joinSolids(pieces);
+      return {
+        surface: surfaceOf(all.positions, all.normals, all.materials),
+        edges: linesOf(all.edges, all.edgeWeights),
+        ...(all.roundPositions.length > 0 && { rounds: surfaceOf(all.roundPositions, all.roundNormals) }),
+        ...(chosen && { outline: linesOf(all.edges, new Float32Array(all.edgeWeights.length).fill(1)) }),
+      };
+    }, [pieces, chosen]);
+    useDispose(made);
+    const { surface, edges, rounds, outline } = made;
+    const look = chosen ? materials.chosenSurface : materials.surface;
+    return (
+      <>
+        {letter !== 'C' && (
+          <mesh geometry={surface} material={materials.shadow} renderOrder={-1} frustumCulled={false} />
+        )}
+        <mesh geometry={surface} material={look} frustumCulled={false} />
+        {rounds && <mesh geometry={rounds} material={materials.hull} frustumCulled={false} />}
+        <mesh geometry={edges} material={materials.edges} renderOrder={2} frustumCulled={false} />
+        {outline && (
+          <mesh geometry={outline} material={materials.outline} renderOrder={3} frustumCulled={false} />
+        )}
+      </>
+    );
+  },
+  (a, b) =>
+    a.letter === b.letter &&
+    a.materials === b.materials &&
+    a.chosen === b.chosen &&
+    a.pieces.length === b.pieces.length &&
+    a.pieces.every((piece, n) => piece === b.pieces[n]),
+);
+
 interface Props {
-  picture: RoomPicture;
+  picture: DrawnPicture;
   letter: SceneView;
   chosenIds: readonly string[];
   /** Cushions are pressed in by bodies that are shown. */
@@ -22,48 +74,26 @@ interface Props {
   materials: SceneMaterials;
 }
 
-/** All pieces in a handful of draw calls; the chosen ones are drawn apart for their outline. */
+/** All pieces; the chosen ones are drawn apart, for their outline and as they change most. */
 export function PieceSolids({ picture, letter, chosenIds, showBodies, materials }: Props) {
-  const made = useMemo(() => {
-    const parts = visibleParts(picture.document, picture.parts, letter);
-    const printsOn = printsByPiece(showBodies ? picture.bodies : []);
-    const others = mergeParts(
-      parts.filter((part) => !chosenIds.includes(part.pieceId)),
-      printsOn,
-    );
-    const chosen = mergeParts(
-      parts.filter((part) => chosenIds.includes(part.pieceId)),
-      printsOn,
-    );
-    return {
-      others: surfaceOf(others.positions, others.normals, others.materials),
-      chosen: surfaceOf(chosen.positions, chosen.normals, chosen.materials),
-      edges: linesOf([...others.edges, ...chosen.edges], [...others.edgeWeights, ...chosen.edgeWeights]),
-      outline: linesOf(
-        chosen.edges,
-        chosen.edgeWeights.map(() => 1),
-      ),
-      rounds: surfaceOf(
-        [...others.roundPositions, ...chosen.roundPositions],
-        [...others.roundNormals, ...chosen.roundNormals],
-      ),
-    };
-  }, [picture, letter, chosenIds, showBodies]);
-  useDispose(made);
-
-  return (
-    <>
-      {letter !== 'C' && (
-        <>
-          <mesh geometry={made.others} material={materials.shadow} renderOrder={-1} frustumCulled={false} />
-          <mesh geometry={made.chosen} material={materials.shadow} renderOrder={-1} frustumCulled={false} />
-        </>
-      )}
-      <mesh geometry={made.others} material={materials.surface} frustumCulled={false} />
-      <mesh geometry={made.chosen} material={materials.chosenSurface} frustumCulled={false} />
-      <mesh geometry={made.rounds} material={materials.hull} frustumCulled={false} />
-      <mesh geometry={made.edges} material={materials.edges} renderOrder={2} frustumCulled={false} />
-      <mesh geometry={made.outline} material={materials.outline} renderOrder={3} frustumCulled={false} />
-    </>
-  );
+  const { document, carried } = picture;
+  const visible = visiblePieces(document, letter);
+  const printsOn = printsByPiece(showBodies ? picture.bodies : []);
+  const drawn = (piece: Piece) => solidsOf(derivePieceParts(piece, document), printsOn(piece.id));
+  return [false, true].flatMap((chosen) => {
+    const all = visible.filter(({ id }) => chosenIds.includes(id) === chosen);
+    const still = all.filter(({ id }) => !carried?.before.has(id)).map(drawn);
+    // Carried pieces are the solids of before, set down elsewhere.
+    const along = all.flatMap(({ id }) => carried?.before.get(id) ?? []).map(drawn);
+    return [
+      { pieces: still, by: undefined },
+      { pieces: along, by: carried },
+    ]
+      .filter(({ pieces }) => pieces.length > 0)
+      .map(({ pieces, by }, n) => (
+        <group key={`${chosen} ${n}`} {...setDown(by)}>
+          <Solids pieces={pieces} letter={letter} chosen={chosen} materials={materials} />
+        </group>
+      ));
+  });
 }

@@ -2,7 +2,7 @@ import { Canvas, useFrame, useThree } from '@react-three/fiber';
 import { lazy, Suspense, useEffect, useLayoutEffect, useMemo, useRef } from 'react';
 import { OrthographicCamera } from 'three';
 import { offerStill, type Taker } from '../export/still';
-import type { RoomPicture } from '../picture';
+import type { DrawnPicture } from '../drawn-picture';
 import { BodyFigures } from './body-figures';
 import { CutCaps } from './cut-caps';
 import { followView } from './follow-view';
@@ -20,7 +20,7 @@ const GhostFigures = lazy(() => import('../bodies/ghost-figures'));
 const METRES = 0.001;
 
 export interface SceneProps {
-  picture: RoomPicture;
+  picture: DrawnPicture;
   controller: ViewController;
   letter: SceneView;
   cut: Cut | undefined;
@@ -82,6 +82,8 @@ function Stage({
   offer = offerStill,
   forPaper = false,
 }: SceneProps) {
+  // Doubt is drawn round those who stand where they were counted.
+  const standing = picture.bodies.filter(({ pieceId }) => !picture.carried?.before.has(pieceId));
   const camera = useMemo(() => new OrthographicCamera(), []);
   const shared = useMemo(() => createSharedUniforms(), []);
   const materials = useMemo(() => createMaterials(shared), [shared]);
@@ -159,7 +161,7 @@ function Stage({
       )}
       {showBodies && showDoubt && (
         <Suspense fallback={null}>
-          <GhostFigures bodies={picture.bodies} palette={palette} shared={shared} />
+          <GhostFigures bodies={standing} palette={palette} shared={shared} />
         </Suspense>
       )}
     </group>

@@ -133,7 +133,9 @@ export function mergeParts(
   return out;
 }
 
-export function surfaceOf(positions: number[], normals: number[], materials?: number[]): BufferGeometry {
+type Numbers = readonly number[] | Float32Array;
+
+export function surfaceOf(positions: Numbers, normals: Numbers, materials?: Numbers): BufferGeometry {
   const geometry = new BufferGeometry();
   geometry.setAttribute('position', new BufferAttribute(new Float32Array(positions), 3));
   geometry.setAttribute('normal', new BufferAttribute(new Float32Array(normals), 3));

@@ -13,8 +13,12 @@ function stands(piece: Piece, letter: SceneView): boolean {
   return letter === 'A' ? z > -0.5 : letter === 'B' ? x < 0.5 : x + z > -0.3;
 }
 
+/** Pieces that are drawn in a view. */
+export const visiblePieces = (document: SetDocument, letter: SceneView): Piece[] =>
+  document.pieces.filter((piece) => stands(piece, letter));
+
 /** Parts that are drawn in a view. */
 export function visibleParts(document: SetDocument, parts: readonly Part[], letter: SceneView): Part[] {
-  const hidden = new Set(document.pieces.filter((piece) => !stands(piece, letter)).map((piece) => piece.id));
-  return parts.filter((part) => !hidden.has(part.pieceId));
+  const visible = new Set(visiblePieces(document, letter).map(({ id }) => id));
+  return parts.filter(({ pieceId }) => visible.has(pieceId));
 }
