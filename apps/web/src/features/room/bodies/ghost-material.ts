@@ -1,5 +1,6 @@
 import { ShaderMaterial, type Vector3 } from 'three';
-import { CUT, type SharedUniforms } from '../scene/shaders.ts';
+import { CUT } from '../scene/shader-chunks.ts';
+import type { SharedUniforms } from '../scene/shaders.ts';
 
 const VERTEX = /* glsl */ `
   uniform vec4 uEye;

@@ -34,7 +34,7 @@ const Solids = memo(
     const made = useMemo(() => {
       const all = joinSolids(pieces);
       return {
-        surface: surfaceOf(all.positions, all.normals, all.materials),
+        surface: surfaceOf(all.positions, all.normals, all.materials, all.grains),
         edges: linesOf(all.edges, all.edgeWeights),
         ...(all.roundPositions.length > 0 && { rounds: surfaceOf(all.roundPositions, all.roundNormals) }),
         ...(chosen && { outline: linesOf(all.edges, new Float32Array(all.edgeWeights.length).fill(1)) }),

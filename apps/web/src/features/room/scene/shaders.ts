@@ -9,6 +9,8 @@ import {
   Vector3,
   Vector4,
 } from 'three';
+import { PIECE_FRAGMENT, PIECE_VERTEX } from './piece-shader.ts';
+import { CUT, ROOM } from './shader-chunks.ts';
 
 /** Values shared by all materials of one scene; changed in place, so nothing is compiled twice. */
 export function createSharedUniforms() {
@@ -26,17 +28,7 @@ export function createSharedUniforms() {
 
 export type SharedUniforms = ReturnType<typeof createSharedUniforms>;
 
-/** Leaves out what a section has cut away. */
-export const CUT = /* glsl */ `
-  uniform vec4 uCut;
-  varying vec3 vRoom;
-  void cut() { if (dot(uCut.xyz, vRoom) > uCut.w) discard; }`;
-
-/** Where a vertex stands in the room, mm: what is carried keeps its own vertices and is set down elsewhere. */
-const ROOM = /* glsl */ `
-  varying vec3 vRoom;
-  vec3 roomOf(vec3 at) { return (modelMatrix * vec4(at, 1.0)).xyz * 1000.0; }`;
-
+/** Of bodies. */
 const SURFACE_VERTEX = /* glsl */ `
   attribute float tone;
   ${ROOM}
@@ -47,25 +39,6 @@ const SURFACE_VERTEX = /* glsl */ `
     vNormalRoom = mat3(modelMatrix) * normal;
     vTone = tone;
     gl_Position = projectionMatrix * modelViewMatrix * vec4(position, 1.0);
-  }`;
-
-/** Top light, front middle, side dark; what a section cuts open is dark inside. */
-const SURFACE_FRAGMENT = /* glsl */ `
-  uniform vec3 uTones[18];
-  varying vec3 vNormalRoom;
-  varying float vTone;
-  ${CUT}
-  void main() {
-    cut();
-    int m = int(vTone + 0.5) * 3;
-    vec3 n = normalize(vNormalRoom);
-    float top = smoothstep(0.5, 0.8, n.y);
-    float side = smoothstep(0.55, 0.8, abs(n.x)) * (n.x > 0.0 ? 0.45 : 0.7);
-    float under = smoothstep(0.3, 0.7, -n.y);
-    vec3 colour = mix(uTones[m + 1], uTones[m + 2], max(side, under));
-    colour = mix(colour, uTones[m], top);
-    if (!gl_FrontFacing) colour = mix(uTones[m + 2], vec3(0.0), 0.12);
-    gl_FragColor = vec4(colour, 1.0);
   }`;
 
 const SHADOW_VERTEX = /* glsl */ `
@@ -176,7 +149,7 @@ const FADE_FRAGMENT = /* glsl */ `
 const CHOSEN_STENCIL = 1;
 
 export function createMaterials(shared: SharedUniforms) {
-  const solid = { vertexShader: SURFACE_VERTEX, fragmentShader: SURFACE_FRAGMENT, uniforms: shared };
+  const solid = { vertexShader: PIECE_VERTEX, fragmentShader: PIECE_FRAGMENT, uniforms: shared };
   const line = (width: number, ink: Vector3) => ({
     vertexShader: LINE_VERTEX,
     fragmentShader: LINE_FRAGMENT,

@@ -2,6 +2,8 @@ export interface SolidArrays {
   positions: number[];
   normals: number[];
   materials: number[];
+  /** Where each point lies in its board, four numbers; see `grainsOf`. */
+  grains: number[];
   /** Ends of straight edges, six numbers a segment. */
   edges: number[];
   edgeWeights: number[];

@@ -3,6 +3,7 @@ import { BufferAttribute, BufferGeometry, ShapeUtils, Vector2 } from 'three';
 import { addCushion, isCushion } from './cushion-solid';
 import type { SeatPrint } from './seat-print';
 import type { SolidArrays } from './solid-arrays';
+import { grainsOf } from './timber';
 import { add, normalise, partAxes, scale } from './vectors';
 
 /** Order of the materials in the palette of the shaders. */
@@ -116,6 +117,7 @@ export function mergeParts(
     positions: [],
     normals: [],
     materials: [],
+    grains: [],
     edges: [],
     edgeWeights: [],
     roundPositions: [],
@@ -124,21 +126,32 @@ export function mergeParts(
   for (const part of parts) {
     const material = MATERIALS.indexOf(part.material);
     const weight = SEAMS[part.role] ?? 1;
+    const start = out.positions.length;
     if (isCushion(part)) addCushion(out, part, material, printsOn(part.pieceId));
     else if (part.solid.shape === 'box') addBox(out, part, part.solid.sizeMm, material, weight);
     else if (part.solid.shape === 'cylinder') {
       addCylinder(out, part, part.solid.radiusMm, part.solid.heightMm, material);
     } else addPrism(out, part, part.solid, material);
+    for (const value of grainsOf(part, out.positions.slice(start))) out.grains.push(value);
   }
   return out;
 }
 
 type Numbers = readonly number[] | Float32Array;
 
-export function surfaceOf(positions: Numbers, normals: Numbers, materials?: Numbers): BufferGeometry {
+/** Triangles as they go to the card; those that have a material and no grain are plain. */
+export function surfaceOf(
+  positions: Numbers,
+  normals: Numbers,
+  materials?: Numbers,
+  grains: Numbers = new Float32Array((materials?.length ?? 0) * 4),
+): BufferGeometry {
   const geometry = new BufferGeometry();
   geometry.setAttribute('position', new BufferAttribute(new Float32Array(positions), 3));
   geometry.setAttribute('normal', new BufferAttribute(new Float32Array(normals), 3));
-  if (materials) geometry.setAttribute('tone', new BufferAttribute(new Float32Array(materials), 1));
+  if (materials) {
+    geometry.setAttribute('tone', new BufferAttribute(new Float32Array(materials), 1));
+    geometry.setAttribute('grain', new BufferAttribute(new Float32Array(grains), 4));
+  }
   return geometry;
 }
