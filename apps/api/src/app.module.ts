@@ -11,6 +11,7 @@ import { ChoicesModule } from './choices/choices.module';
 import { logParameters } from './common/request-log';
 import { settings } from './config/settings';
 import { CushionOrdersModule } from './cushion-orders/cushion-orders.module';
+import { CushionSettingsModule } from './cushion-settings/cushion-settings.module';
 import { DatabaseModule } from './database/database.module';
 import { DemoModule } from './demo/demo.module';
 import { HealthModule } from './health/health.module';
@@ -52,6 +53,7 @@ import { WorkshopsModule } from './workshops/workshops.module';
     SuggestionsModule,
     ChoicesModule,
     UpholsterersModule,
+    CushionSettingsModule,
     CushionOrdersModule,
     DemoModule,
     CastErasureModule,

@@ -84,6 +84,8 @@ export type { RunJoints } from './cushions/run-joints.ts';
 export { TUFTING_WORDS, type TuftingChoice } from './cushions/tufting-choice.ts';
 export { FULLNESS_RULES, type FullnessRule } from './cushions/tufting.ts';
 export * from './cushions/cushion-settings.ts';
+export * from './cushions/foam-grades.ts';
+export * from './cushions/workshop-cushions.ts';
 export { biasStripLength, weltStrips, zipPanel, type CushionSize } from './cushions/cushion-sizes.ts';
 export { chooseCushion, mayHaveCushion, type CushionChange } from './room/cushion-choices.ts';
 export type * from './cushions/cushion-spec.ts';

@@ -1,4 +1,10 @@
-import { type CushionSpec, deriveCushions, type SetDocument } from '@settlewright/geometry';
+import {
+  type CushionRules,
+  type CushionSpec,
+  deriveCushions,
+  keptCushionRules,
+  type SetDocument,
+} from '@settlewright/geometry';
 import { Injectable } from '@nestjs/common';
 import type { MemberInfo } from '../common/access.decorator';
 import { Problem } from '../common/problem';
@@ -18,6 +24,8 @@ export interface IssuedSet {
   issuedAt: Date;
   issuedByName: string;
   note: string;
+  /** Allowances and foams that were in force when it was issued. */
+  cushionRules: CushionRules;
   cushions: CushionSpec[];
 }
 
@@ -27,13 +35,15 @@ export class IssuedSets {
 
   async read({ member, productionId, setId, letter }: IssuedPlace): Promise<IssuedSet> {
     const revision = await this.revisions.find(member, productionId, setId, letter);
+    const cushionRules = keptCushionRules(revision.cushionRules);
     return {
       letter: revision.letter,
       document: revision.document,
       issuedAt: revision.issuedAt,
       issuedByName: revision.issuedBy?.name ?? '',
       note: revision.note,
-      cushions: deriveCushions(revision.document),
+      cushionRules,
+      cushions: deriveCushions(revision.document, cushionRules.settings),
     };
   }
 

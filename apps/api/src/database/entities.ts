@@ -13,6 +13,7 @@ import { OrderFile } from '../cushion-orders/files/order-file.entity';
 import { OrderInspection } from '../cushion-orders/inspections/order-inspection.entity';
 import { OrderQuestion } from '../cushion-orders/questions/order-question.entity';
 import { OrderQuote } from '../cushion-orders/quotes/order-quote.entity';
+import { CushionSettingsRow } from '../cushion-settings/cushion-settings.entity';
 import { Invitation } from '../invitations/entities/invitation.entity';
 import { OutboxAttachment } from '../mail/entities/outbox-attachment.entity';
 import { OutboxMail } from '../mail/entities/outbox-mail.entity';
@@ -40,6 +41,7 @@ export const ENTITIES = [
   BuiltPart,
   CastMember,
   CushionOrder,
+  CushionSettingsRow,
   DesignedSet,
   DimensionSearch,
   Invitation,

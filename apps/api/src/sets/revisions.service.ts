@@ -8,6 +8,7 @@ import type { MemberInfo } from '../common/access.decorator';
 import type { Page, PageQuery } from '../common/page.dto';
 import { Problem } from '../common/problem';
 import { readPage } from '../common/read-page';
+import { CushionSettingsService } from '../cushion-settings/cushion-settings.service';
 import { FitCheckService } from '../fit-checks/fit-check.service';
 import { withoutPerson } from '../fit-checks/without-person';
 import { ProductionsService } from '../productions/productions.service';
@@ -44,6 +45,7 @@ export class RevisionsService {
     private readonly productions: ProductionsService,
     private readonly people: SeatedPeople,
     private readonly fit: FitCheckService,
+    private readonly cushions: CushionSettingsService,
     private readonly audit: AuditService,
   ) {}
 
@@ -77,6 +79,7 @@ export class RevisionsService {
           document,
           fitSheet,
           counts: fitSheet.counts,
+          cushionRules: await this.cushions.rules(member.workshopId, manager),
           note: dto.note ?? '',
           issuedById: member.userId,
         }),

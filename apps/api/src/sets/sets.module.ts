@@ -1,6 +1,7 @@
 import { Module } from '@nestjs/common';
 import { TypeOrmModule } from '@nestjs/typeorm';
 import { CastModule } from '../cast/cast.module';
+import { CushionSettingsModule } from '../cushion-settings/cushion-settings.module';
 import { FitChecksModule } from '../fit-checks/fit-checks.module';
 import { ProductionsModule } from '../productions/productions.module';
 import { WorkshopsModule } from '../workshops/workshops.module';
@@ -33,6 +34,7 @@ import { SetsService } from './sets.service';
     ProductionsModule,
     CastModule,
     FitChecksModule,
+    CushionSettingsModule,
     WorkshopsModule,
   ],
   controllers: [

@@ -36,6 +36,8 @@ export const EXPECTED_ACCESS: Record<string, AccessRule> = {
   'POST /workshops': SIGNED_IN,
   [`GET ${W}`]: EVERY_MEMBER,
   [`PATCH ${W}`]: OWNER,
+  [`GET ${W}/cushion-settings`]: EVERY_MEMBER,
+  [`PUT ${W}/cushion-settings`]: MAKERS,
   [`GET ${W}/members`]: EVERY_MEMBER,
   [`PATCH ${W}/members/{userId}`]: OWNER,
   [`DELETE ${W}/members/{userId}`]: EVERY_MEMBER,

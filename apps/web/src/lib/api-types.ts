@@ -789,6 +789,22 @@ export interface paths {
         patch?: never;
         trace?: never;
     };
+    "/api/workshops/{workshopId}/cushion-settings": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        get: operations["CushionSettings_read"];
+        put: operations["CushionSettings_save"];
+        post?: never;
+        delete?: never;
+        options?: never;
+        head?: never;
+        patch?: never;
+        trace?: never;
+    };
     "/api/workshops/{workshopId}/populations": {
         parameters: {
             query?: never;
@@ -1317,6 +1333,118 @@ export interface paths {
         patch?: never;
         trace?: never;
     };
+    "/api/workshops/{workshopId}/productions/{productionId}/orders/{orderId}/life": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        get: operations["OrderLife_read"];
+        put?: never;
+        post?: never;
+        delete?: never;
+        options?: never;
+        head?: never;
+        patch?: never;
+        trace?: never;
+    };
+    "/api/workshops/{workshopId}/productions/{productionId}/orders/{orderId}/quotes": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        get?: never;
+        put?: never;
+        post: operations["OrderLife_recordQuote"];
+        delete?: never;
+        options?: never;
+        head?: never;
+        patch?: never;
+        trace?: never;
+    };
+    "/api/workshops/{workshopId}/productions/{productionId}/orders/{orderId}/quotes/{quoteId}/accept": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        get?: never;
+        put?: never;
+        post: operations["OrderLife_acceptQuote"];
+        delete?: never;
+        options?: never;
+        head?: never;
+        patch?: never;
+        trace?: never;
+    };
+    "/api/workshops/{workshopId}/productions/{productionId}/orders/{orderId}/quotes/{quoteId}/decline": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        get?: never;
+        put?: never;
+        post: operations["OrderLife_declineQuote"];
+        delete?: never;
+        options?: never;
+        head?: never;
+        patch?: never;
+        trace?: never;
+    };
+    "/api/workshops/{workshopId}/productions/{productionId}/orders/{orderId}/questions": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        get?: never;
+        put?: never;
+        post: operations["OrderLife_ask"];
+        delete?: never;
+        options?: never;
+        head?: never;
+        patch?: never;
+        trace?: never;
+    };
+    "/api/workshops/{workshopId}/productions/{productionId}/orders/{orderId}/questions/{questionId}/answer": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        get?: never;
+        put?: never;
+        post: operations["OrderLife_answer"];
+        delete?: never;
+        options?: never;
+        head?: never;
+        patch?: never;
+        trace?: never;
+    };
+    "/api/workshops/{workshopId}/productions/{productionId}/orders/{orderId}/inspections": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        get?: never;
+        put?: never;
+        post: operations["OrderLife_inspect"];
+        delete?: never;
+        options?: never;
+        head?: never;
+        patch?: never;
+        trace?: never;
+    };
     "/api/link/{token}": {
         parameters: {
             query?: never;
@@ -1375,6 +1503,86 @@ export interface paths {
         get?: never;
         put?: never;
         post: operations["Link_reply"];
+        delete?: never;
+        options?: never;
+        head?: never;
+        patch?: never;
+        trace?: never;
+    };
+    "/api/link/{token}/life": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        get: operations["LinkLife_read"];
+        put?: never;
+        post?: never;
+        delete?: never;
+        options?: never;
+        head?: never;
+        patch?: never;
+        trace?: never;
+    };
+    "/api/link/{token}/quote": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        get?: never;
+        put?: never;
+        post: operations["LinkLife_quote"];
+        delete?: never;
+        options?: never;
+        head?: never;
+        patch?: never;
+        trace?: never;
+    };
+    "/api/link/{token}/state": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        get?: never;
+        put?: never;
+        post: operations["LinkLife_mark"];
+        delete?: never;
+        options?: never;
+        head?: never;
+        patch?: never;
+        trace?: never;
+    };
+    "/api/link/{token}/questions": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        get?: never;
+        put?: never;
+        post: operations["LinkLife_ask"];
+        delete?: never;
+        options?: never;
+        head?: never;
+        patch?: never;
+        trace?: never;
+    };
+    "/api/link/{token}/questions/{questionId}/answer": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        get?: never;
+        put?: never;
+        post: operations["LinkLife_answer"];
         delete?: never;
         options?: never;
         head?: never;
@@ -2381,6 +2589,91 @@ export interface components {
             /** @description id of a part of the draft or of the latest revision */
             partId: string;
             built: boolean;
+        };
+        FoamLayerDto: {
+            name: string;
+            thicknessMm: number;
+            densityKgM3: number;
+            ifd25N: number;
+        };
+        FoamGradeDto: {
+            name: string;
+            /** @enum {string} */
+            use: "seat" | "back" | "either";
+            densityKgM3: number;
+            /** @description 25 % indentation force deflection, newtons */
+            ifd25N: number;
+            supportFactor: number;
+            thicknessMm: number;
+            /** @description from the top down */
+            layers: components["schemas"]["FoamLayerDto"][];
+            /** @description bonded polyester, both faces together */
+            wrapMm: number;
+        };
+        WorkshopCushionsDto: {
+            /** @description millimetres by the name of the allowance; what is absent is as usual */
+            allowancesMm: {
+                /** @description gap to a wall, end wall or arm; 3.175 mm as usual */
+                wallGap?: number;
+                /** @description gap at a free end; 3.175 mm as usual */
+                freeGap?: number;
+                /** @description each cushion’s share of the gap to its neighbour; 3.175 mm as usual */
+                neighbourGap?: number;
+                /** @description gap to the back pad; 6.35 mm as usual */
+                backGap?: number;
+                /** @description gap at the front edge; 0 mm as usual */
+                frontGap?: number;
+                /** @description foam larger than finished, in width and in depth; 12.7 mm as usual */
+                foamOversize?: number;
+                /** @description seam allowance; 12.7 mm as usual */
+                seam?: number;
+                /** @description zip round each back corner; 76.19999999999999 mm as usual */
+                zipWrap?: number;
+                /** @description added to the boxing width for both halves of the zip panel; 38.099999999999994 mm as usual */
+                zipAllowance?: number;
+                /** @description welt added for the join of each seam; 76.19999999999999 mm as usual */
+                weltJoin?: number;
+                /** @description width of the welt strip; 38.099999999999994 mm as usual */
+                weltStrip?: number;
+                /** @description width of the cloth; 1371.6 mm as usual */
+                clothWidth?: number;
+                /** @description board smaller than finished, in width and in depth; 12.7 mm as usual */
+                boardSmaller?: number;
+                /** @description tight boxing cut higher than the foam, seams included; 6.35 mm as usual */
+                tightBoxing?: number;
+                /** @description foam larger than its board, on every side; 9.524999999999999 mm as usual */
+                boardFoamOver?: number;
+                /** @description cover pulled round and stapled under the board; 63.5 mm as usual */
+                pull?: number;
+                /** @description how far a button without fullness is pulled in; 9.524999999999999 mm as usual */
+                buttonPull?: number;
+                /** @description least distance of a button from the edge; 101.6 mm as usual */
+                buttonToEdge?: number;
+            };
+            foams: components["schemas"]["FoamGradeDto"][];
+        };
+        CushionSettingsDto: {
+            /** @description 0 until something is set */
+            number: number;
+            settings: components["schemas"]["WorkshopCushionsDto"];
+            /** Format: date-time */
+            changedAt: string | null;
+            changedByName: string | null;
+        };
+        SaveCushionSettingsDto: {
+            /** @description number of the settings that the change began from */
+            baseNumber: number;
+            settings: components["schemas"]["WorkshopCushionsDto"];
+        };
+        ProblemBody: {
+            type: string;
+            title: string;
+            status: number;
+            /** @description a word for programs, as `draft-conflict` */
+            code: string;
+            /** @description a sentence for people */
+            detail: string;
+            fields?: components["schemas"]["ProblemField"][];
         };
         /** @enum {string} */
         MeasureKey: "stature" | "weight_kg" | "sitting_height" | "eye_height_sitting" | "acromial_height_sitting" | "elbow_rest_height" | "popliteal_height" | "knee_height_sitting" | "buttock_popliteal_length" | "buttock_knee_length" | "thigh_clearance" | "hip_breadth_sitting" | "hip_breadth" | "bideltoid_breadth" | "forearm_forearm_breadth" | "biacromial_breadth" | "abdominal_extension_depth_sitting" | "chest_depth" | "buttock_depth" | "foot_length" | "foot_breadth" | "acromion_radiale_length" | "shoulder_elbow_length" | "forearm_hand_length" | "thumbtip_reach" | "functional_leg_length" | "head_breadth" | "head_length" | "waist_circumference" | "bicristal_breadth" | "overhead_fingertip_reach_sitting" | "span" | "waist_depth" | "hand_length" | "lateral_malleolus_height" | "trochanterion_height" | "acromial_height" | "chest_circumference" | "buttock_circumference" | "chest_breadth" | "waist_breadth";
@@ -3417,7 +3710,7 @@ export interface components {
             neededBy: string | null;
             cushionCount: number;
             upholsterer: components["schemas"]["OrderUpholstererDto"] | null;
-            /** @description messages of the upholsterer that nobody has answered */
+            /** @description messages of the upholsterer that nobody has answered, and questions of either side */
             openQuestions: number;
             /** Format: date-time */
             updatedAt: string;
@@ -3450,6 +3743,8 @@ export interface components {
             neededBy?: string | null;
             /** @description marks as C1; null: every cushion */
             cushionMarks?: string[] | null;
+            /** @description how far a finished size may be off */
+            toleranceMm?: number;
             spec?: components["schemas"]["OrderSpecInput"];
         };
         OrderSpecDto: {
@@ -3536,16 +3831,45 @@ export interface components {
             closure: components["schemas"]["CushionClosureDto"];
             welt: components["schemas"]["CushionWeltDto"];
         };
+        CushionWarningDto: {
+            /** @enum {string} */
+            code: "off-joint" | "buttons-outside" | "closure-on-camera-side";
+            columns?: number;
+            furthestMm?: number;
+            count?: number;
+            /** @enum {string} */
+            edge?: "back" | "front" | "left" | "right";
+        };
         CushionFoamDto: {
             grade: string;
             densityKgM3: number;
             ifd25N: number;
             supportFactor: number;
         };
+        TuftFieldDto: {
+            across: number;
+            high: number;
+            widthMm: number;
+            heightMm: number;
+            borderMm: number;
+        };
+        CushionTuftingDto: {
+            /** @enum {string} */
+            kind: "none" | "pull-in" | "biscuit" | "diamond";
+            pullMm: number;
+            field?: components["schemas"]["TuftFieldDto"];
+            /** @enum {string} */
+            fullness?: "foam-thickness" | "half-again";
+        };
         ButtonColumnDto: {
             fromSeamMm: number;
             fromDatumMm: number;
             offJointMm: number;
+        };
+        RowsOverSeatDto: {
+            overMm: number[];
+            sinkMm: number;
+            goesDown: boolean;
         };
         ButtonTableDto: {
             columns: components["schemas"]["ButtonColumnDto"][];
@@ -3587,9 +3911,14 @@ export interface components {
             faults: string[];
             warnings: components["schemas"]["CushionWarningDto"][];
             foam: components["schemas"]["CushionFoamDto"];
+            tufting: components["schemas"]["CushionTuftingDto"];
             buttons: components["schemas"]["ButtonTableDto"];
             boardLinesMm: number[];
             datum: components["schemas"]["CushionDatumDto"];
+            cameraSides: ("back" | "front" | "left" | "right")[];
+            /** @enum {string} */
+            holdDown?: "none" | "non-slip-mesh" | "hook-and-loop" | "snaps" | "turn-buttons" | "french-cleat" | "keyhole-plates";
+            notes?: string;
         };
         SentDto: {
             revisionLetter: string;
@@ -3613,7 +3942,7 @@ export interface components {
             expiresAt: string | null;
         };
         /** @enum {string} */
-        MailState: "queued" | "sending" | "sent" | "failed" | "perhaps-sent";
+        MailState: "queued" | "sending" | "sent" | "failed" | "perhaps-sent" | "bounced";
         OrderMailDto: {
             /** Format: uuid */
             id: string;
@@ -3624,7 +3953,7 @@ export interface components {
         /** @enum {string} */
         RecordedOrderState: "quoted" | "agreed" | "first-article" | "in-work" | "shipped" | "received" | "closed" | "cancelled";
         /** @enum {string} */
-        OrderEventKind: "created" | "sent" | "acknowledged" | "state" | "link-renewed" | "link-revoked";
+        OrderEventKind: "created" | "sent" | "acknowledged" | "state" | "link-renewed" | "link-revoked" | "quote-given" | "quote-accepted" | "quote-declined" | "first-article-accepted" | "first-article-rejected" | "delivery-accepted" | "delivery-rejected" | "deposit-paid" | "deposit-recorded" | "refund-recorded" | "mail-bounced";
         /** @enum {string} */
         OrderSide: "workshop" | "upholsterer";
         OrderEventDto: {
@@ -3657,7 +3986,7 @@ export interface components {
             neededBy: string | null;
             cushionCount: number;
             upholsterer: components["schemas"]["OrderUpholstererDto"] | null;
-            /** @description messages of the upholsterer that nobody has answered */
+            /** @description messages of the upholsterer that nobody has answered, and questions of either side */
             openQuestions: number;
             /** Format: date-time */
             updatedAt: string;
@@ -3666,6 +3995,8 @@ export interface components {
             /** @description null: every cushion of the revision */
             cushionMarks: string[] | null;
             spec: components["schemas"]["OrderSpecDto"];
+            /** @description how far a finished size may be off */
+            toleranceMm: number;
             cushions: components["schemas"]["CushionDto"][];
             sent: components["schemas"]["SentDto"] | null;
             /** @description of what was last sent */
@@ -3688,6 +4019,8 @@ export interface components {
             neededBy?: string | null;
             /** @description marks as C1; null: every cushion */
             cushionMarks?: string[] | null;
+            /** @description how far a finished size may be off */
+            toleranceMm?: number;
             spec?: components["schemas"]["OrderSpecInput"];
         };
         SendOrderDto: {
@@ -3723,6 +4056,189 @@ export interface components {
         WriteMessageDto: {
             text: string;
         };
+        /** @enum {string} */
+        OrderChangedField: "revision" | "title" | "needed-by" | "cushions" | "tolerance" | "cover" | "foam" | "welt" | "closure" | "fixing" | "buttons" | "notes" | "flammability" | "width" | "depth" | "thickness" | "foam-grade" | "hand" | "button-count" | "button-places";
+        OrderChangeDto: {
+            /** @description null: the order itself */
+            mark: string | null;
+            field: components["schemas"]["OrderChangedField"];
+            /** @description of sizes */
+            beforeMm?: number;
+            /** @description of sizes */
+            afterMm?: number;
+            /** @description of all else */
+            before?: string;
+            /** @description of all else */
+            after?: string;
+        };
+        OrderWordDto: {
+            name: string;
+            /** Format: date-time */
+            at: string;
+        };
+        OrderAgreementDto: {
+            /** @description can make it as drawn */
+            upholsterer: components["schemas"]["OrderWordDto"] | null;
+            /** @description accepted the quote for it */
+            workshop: components["schemas"]["OrderWordDto"] | null;
+        };
+        /** @enum {string} */
+        InspectedState: "none" | "waiting" | "accepted" | "rejected";
+        /** @enum {string} */
+        MarkedOrderState: "first-article" | "in-work" | "shipped";
+        QuoteLineDto: {
+            text: string;
+            quantity: number;
+            /** @description of one, in the smallest unit: cents */
+            unitMinor: number;
+        };
+        /** @enum {string} */
+        QuoteState: "offered" | "accepted" | "declined" | "replaced";
+        QuoteDto: {
+            /** Format: uuid */
+            id: string;
+            side: components["schemas"]["OrderSide"];
+            byName: string;
+            /** Format: date-time */
+            at: string;
+            /** @description exchanged with the upholsterer who has the order now */
+            current: boolean;
+            revisionLetter: string;
+            lines: components["schemas"]["QuoteLineDto"][];
+            currency: string;
+            taxText: string;
+            taxMinor: number;
+            totalMinor: number;
+            /** Format: date */
+            validUntil: string;
+            /** Format: date */
+            deliveryOn: string | null;
+            note: string;
+            state: components["schemas"]["QuoteState"];
+            /** @description it is for the order as it was last sent, and its validity has not passed */
+            inForce: boolean;
+            /** Format: date-time */
+            answeredAt: string | null;
+            answeredByName: string;
+            answer: string;
+        };
+        QuestionDto: {
+            /** Format: uuid */
+            id: string;
+            side: components["schemas"]["OrderSide"];
+            byName: string;
+            /** Format: date-time */
+            at: string;
+            /** @description exchanged with the upholsterer who has the order now */
+            current: boolean;
+            cushionMark: string | null;
+            text: string;
+            /** @description empty while it is open */
+            answer: string;
+            answeredByName: string;
+            /** Format: date-time */
+            answeredAt: string | null;
+        };
+        /** @enum {string} */
+        InspectionKind: "first-article" | "received";
+        /** @enum {string} */
+        SizeVerdict: "within" | "out" | "not-measured";
+        InspectedSizeDto: {
+            /** @enum {string} */
+            size: "widthMm" | "depthMm" | "thicknessMm";
+            askedMm: number;
+            measuredMm: number | null;
+            verdict: components["schemas"]["SizeVerdict"];
+        };
+        InspectedCushionDto: {
+            mark: string;
+            sizes: components["schemas"]["InspectedSizeDto"][];
+            /** @description of the whole cushion: out when one size is */
+            verdict: components["schemas"]["SizeVerdict"];
+            note: string;
+        };
+        /** @enum {string} */
+        InspectionOutcome: "accepted" | "rejected";
+        InspectionDto: {
+            /** Format: uuid */
+            id: string;
+            side: components["schemas"]["OrderSide"];
+            byName: string;
+            /** Format: date-time */
+            at: string;
+            /** @description exchanged with the upholsterer who has the order now */
+            current: boolean;
+            kind: components["schemas"]["InspectionKind"];
+            revisionLetter: string;
+            toleranceMm: number;
+            cushions: components["schemas"]["InspectedCushionDto"][];
+            outcome: components["schemas"]["InspectionOutcome"];
+            note: string;
+            photoIds: string[];
+        };
+        OrderLifeDto: {
+            toleranceMm: number;
+            /** @description the revision that the present one replaced */
+            earlierRevision: string | null;
+            /** @description since the order was sent before */
+            changes: components["schemas"]["OrderChangeDto"][];
+            /** @description the words of both sides on what was last sent */
+            agreement: components["schemas"]["OrderAgreementDto"];
+            firstArticle: components["schemas"]["InspectedState"];
+            delivery: components["schemas"]["InspectedState"];
+            upholstererMayMark: components["schemas"]["MarkedOrderState"][];
+            upholstererMayQuote: boolean;
+            /** @description newest first */
+            quotes: components["schemas"]["QuoteDto"][];
+            /** @description oldest first */
+            questions: components["schemas"]["QuestionDto"][];
+            /** @description newest first */
+            inspections: components["schemas"]["InspectionDto"][];
+        };
+        RecordQuoteDto: {
+            lines: components["schemas"]["QuoteLineDto"][];
+            /** @description ISO 4217, as USD */
+            currency: string;
+            /** @description as "Sales tax 8.25 %" */
+            taxText?: string;
+            taxMinor?: number;
+            /** Format: date */
+            validUntil: string;
+            /** Format: date */
+            deliveryOn?: string | null;
+            note?: string;
+            /** @description how it is known: "by telephone, 2 February" */
+            heard: string;
+        };
+        DeclineQuoteDto: {
+            /** @description goes to the upholsterer */
+            reason: string;
+        };
+        AskQuestionDto: {
+            /** @description a mark as C1; null: the whole order */
+            cushionMark?: string | null;
+            text: string;
+        };
+        AnswerQuestionDto: {
+            answer: string;
+        };
+        InspectCushionDto: {
+            /** @description as C1 */
+            mark: string;
+            widthMm?: number | null;
+            depthMm?: number | null;
+            thicknessMm?: number | null;
+            note?: string;
+        };
+        InspectDto: {
+            kind: components["schemas"]["InspectionKind"];
+            cushions: components["schemas"]["InspectCushionDto"][];
+            outcome: components["schemas"]["InspectionOutcome"];
+            /** @description asked for on rejecting, and on accepting what is out or was not measured */
+            note?: string;
+            /** @description files of the order */
+            photoIds?: string[];
+        };
         PublicWorkshopDto: {
             name: string;
             telephone: string;
@@ -3736,46 +4252,17 @@ export interface components {
             /** Format: date-time */
             at: string;
         };
-        CushionWarningDto: {
-            /** @enum {string} */
-            code: "off-joint" | "buttons-outside" | "closure-on-camera-side";
-            columns?: number;
-            furthestMm?: number;
-            count?: number;
-            /** @enum {string} */
-            edge?: "back" | "front" | "left" | "right";
-        };
         PublicOrderDto: {
             workshop: components["schemas"]["PublicWorkshopDto"];
             number: number;
             title: string;
             productionName: string;
             setName: string;
-        TuftFieldDto: {
-            across: number;
-            high: number;
-            widthMm: number;
-            heightMm: number;
-            borderMm: number;
-        };
-        CushionTuftingDto: {
-            /** @enum {string} */
-            kind: "none" | "pull-in" | "biscuit" | "diamond";
-            pullMm: number;
-            field?: components["schemas"]["TuftFieldDto"];
-            /** @enum {string} */
-            fullness?: "foam-thickness" | "half-again";
-        };
             /** @description the upholsterer the order is for */
             upholstererName: string;
             state: components["schemas"]["OrderState"];
             revisionLetter: string;
             /** Format: date-time */
-        RowsOverSeatDto: {
-            overMm: number[];
-            sinkMm: number;
-            goesDown: boolean;
-        };
             revisionIssuedAt: string;
             /** Format: date */
             neededBy: string | null;
@@ -3804,20 +4291,42 @@ export interface components {
              */
             sentAt?: string;
         };
+        GiveQuoteDto: {
+            lines: components["schemas"]["QuoteLineDto"][];
+            /** @description ISO 4217, as USD */
+            currency: string;
+            /** @description as "Sales tax 8.25 %" */
+            taxText?: string;
+            taxMinor?: number;
+            /** Format: date */
+            validUntil: string;
+            /** Format: date */
+            deliveryOn?: string | null;
+            note?: string;
+            /** @description who quotes, typed */
+            name: string;
+            /**
+             * Format: date-time
+             * @description `sentAt` of the order that was read
+             */
+            sentAt: string;
+        };
+        MarkStateDto: {
+            to: components["schemas"]["MarkedOrderState"];
+            /** @description who says so, typed */
+            name: string;
+            /** @description as the carrier and its number */
+            note?: string;
+        };
         NamedPlaceDto: {
             /** @description where the text stands, in words */
             where: string;
             before: string;
             /** @description the name, or the part of it, as it was written */
             name: string;
-            tufting: components["schemas"]["CushionTuftingDto"];
             after: string;
             /** @description it went to the upholsterer or came from there */
             alreadySent: boolean;
-            cameraSides: ("back" | "front" | "left" | "right")[];
-            /** @enum {string} */
-            holdDown?: "none" | "non-slip-mesh" | "hook-and-loop" | "snaps" | "turn-buttons" | "french-cleat" | "keyhole-plates";
-            notes?: string;
             /** @description how often the same words stand there, as in earlier drafts */
             copies: number;
         };
@@ -3852,16 +4361,6 @@ export interface components {
             items: components["schemas"]["PersonNextDto"][];
             /** @description taken places that were not looked at, as there are too many for one answer; ask again for more */
             leftOut: number;
-        };
-        ProblemBody: {
-            type: string;
-            title: string;
-            status: number;
-            /** @description a word for programs, as `draft-conflict` */
-            code: string;
-            /** @description a sentence for people */
-            detail: string;
-            fields?: components["schemas"]["ProblemField"][];
         };
     };
     responses: never;
@@ -6185,6 +6684,79 @@ export interface operations {
             };
         };
     };
+    CushionSettings_read: {
+        parameters: {
+            query?: never;
+            header?: never;
+            path: {
+                workshopId: unknown;
+            };
+            cookie?: never;
+        };
+        requestBody?: never;
+        responses: {
+            200: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["CushionSettingsDto"];
+                };
+            };
+            /** @description what went wrong (RFC 9457) */
+            default: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemBody"];
+                };
+            };
+        };
+    };
+    CushionSettings_save: {
+        parameters: {
+            query?: never;
+            header?: never;
+            path: {
+                workshopId: unknown;
+            };
+            cookie?: never;
+        };
+        requestBody: {
+            content: {
+                "application/json": components["schemas"]["SaveCushionSettingsDto"];
+            };
+        };
+        responses: {
+            200: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["CushionSettingsDto"];
+                };
+            };
+            /** @description somebody changed them meanwhile */
+            409: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["ProblemBody"];
+                };
+            };
+            /** @description what went wrong (RFC 9457) */
+            default: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemBody"];
+                };
+            };
+        };
+    };
     Populations_list: {
         parameters: {
             query?: {
@@ -7723,6 +8295,253 @@ export interface operations {
             };
         };
     };
+    OrderLife_read: {
+        parameters: {
+            query?: never;
+            header?: never;
+            path: {
+                productionId: string;
+                orderId: string;
+                workshopId: unknown;
+            };
+            cookie?: never;
+        };
+        requestBody?: never;
+        responses: {
+            200: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["OrderLifeDto"];
+                };
+            };
+            /** @description what went wrong (RFC 9457) */
+            default: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemBody"];
+                };
+            };
+        };
+    };
+    OrderLife_recordQuote: {
+        parameters: {
+            query?: never;
+            header?: never;
+            path: {
+                productionId: string;
+                orderId: string;
+                workshopId: unknown;
+            };
+            cookie?: never;
+        };
+        requestBody: {
+            content: {
+                "application/json": components["schemas"]["RecordQuoteDto"];
+            };
+        };
+        responses: {
+            200: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["OrderLifeDto"];
+                };
+            };
+            /** @description what went wrong (RFC 9457) */
+            default: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemBody"];
+                };
+            };
+        };
+    };
+    OrderLife_acceptQuote: {
+        parameters: {
+            query?: never;
+            header?: never;
+            path: {
+                productionId: string;
+                orderId: string;
+                quoteId: string;
+                workshopId: unknown;
+            };
+            cookie?: never;
+        };
+        requestBody?: never;
+        responses: {
+            200: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["OrderLifeDto"];
+                };
+            };
+            /** @description what went wrong (RFC 9457) */
+            default: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemBody"];
+                };
+            };
+        };
+    };
+    OrderLife_declineQuote: {
+        parameters: {
+            query?: never;
+            header?: never;
+            path: {
+                productionId: string;
+                orderId: string;
+                quoteId: string;
+                workshopId: unknown;
+            };
+            cookie?: never;
+        };
+        requestBody: {
+            content: {
+                "application/json": components["schemas"]["DeclineQuoteDto"];
+            };
+        };
+        responses: {
+            200: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["OrderLifeDto"];
+                };
+            };
+            /** @description what went wrong (RFC 9457) */
+            default: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemBody"];
+                };
+            };
+        };
+    };
+    OrderLife_ask: {
+        parameters: {
+            query?: never;
+            header?: never;
+            path: {
+                productionId: string;
+                orderId: string;
+                workshopId: unknown;
+            };
+            cookie?: never;
+        };
+        requestBody: {
+            content: {
+                "application/json": components["schemas"]["AskQuestionDto"];
+            };
+        };
+        responses: {
+            200: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["OrderLifeDto"];
+                };
+            };
+            /** @description what went wrong (RFC 9457) */
+            default: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemBody"];
+                };
+            };
+        };
+    };
+    OrderLife_answer: {
+        parameters: {
+            query?: never;
+            header?: never;
+            path: {
+                productionId: string;
+                orderId: string;
+                questionId: string;
+                workshopId: unknown;
+            };
+            cookie?: never;
+        };
+        requestBody: {
+            content: {
+                "application/json": components["schemas"]["AnswerQuestionDto"];
+            };
+        };
+        responses: {
+            200: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["OrderLifeDto"];
+                };
+            };
+            /** @description what went wrong (RFC 9457) */
+            default: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemBody"];
+                };
+            };
+        };
+    };
+    OrderLife_inspect: {
+        parameters: {
+            query?: never;
+            header?: never;
+            path: {
+                productionId: string;
+                orderId: string;
+                workshopId: unknown;
+            };
+            cookie?: never;
+        };
+        requestBody: {
+            content: {
+                "application/json": components["schemas"]["InspectDto"];
+            };
+        };
+        responses: {
+            200: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["OrderLifeDto"];
+                };
+            };
+            /** @description what went wrong (RFC 9457) */
+            default: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemBody"];
+                };
+            };
+        };
+    };
     Link_read: {
         parameters: {
             query?: never;
@@ -7838,6 +8657,173 @@ export interface operations {
                 };
                 content: {
                     "application/json": components["schemas"]["PublicOrderDto"];
+                };
+            };
+            /** @description what went wrong (RFC 9457) */
+            default: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemBody"];
+                };
+            };
+        };
+    };
+    LinkLife_read: {
+        parameters: {
+            query?: never;
+            header?: never;
+            path: {
+                token: string;
+            };
+            cookie?: never;
+        };
+        requestBody?: never;
+        responses: {
+            200: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["OrderLifeDto"];
+                };
+            };
+            /** @description what went wrong (RFC 9457) */
+            default: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemBody"];
+                };
+            };
+        };
+    };
+    LinkLife_quote: {
+        parameters: {
+            query?: never;
+            header?: never;
+            path: {
+                token: string;
+            };
+            cookie?: never;
+        };
+        requestBody: {
+            content: {
+                "application/json": components["schemas"]["GiveQuoteDto"];
+            };
+        };
+        responses: {
+            200: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["OrderLifeDto"];
+                };
+            };
+            /** @description what went wrong (RFC 9457) */
+            default: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemBody"];
+                };
+            };
+        };
+    };
+    LinkLife_mark: {
+        parameters: {
+            query?: never;
+            header?: never;
+            path: {
+                token: string;
+            };
+            cookie?: never;
+        };
+        requestBody: {
+            content: {
+                "application/json": components["schemas"]["MarkStateDto"];
+            };
+        };
+        responses: {
+            200: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["OrderLifeDto"];
+                };
+            };
+            /** @description what went wrong (RFC 9457) */
+            default: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemBody"];
+                };
+            };
+        };
+    };
+    LinkLife_ask: {
+        parameters: {
+            query?: never;
+            header?: never;
+            path: {
+                token: string;
+            };
+            cookie?: never;
+        };
+        requestBody: {
+            content: {
+                "application/json": components["schemas"]["AskQuestionDto"];
+            };
+        };
+        responses: {
+            200: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["OrderLifeDto"];
+                };
+            };
+            /** @description what went wrong (RFC 9457) */
+            default: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemBody"];
+                };
+            };
+        };
+    };
+    LinkLife_answer: {
+        parameters: {
+            query?: never;
+            header?: never;
+            path: {
+                token: string;
+                questionId: string;
+            };
+            cookie?: never;
+        };
+        requestBody: {
+            content: {
+                "application/json": components["schemas"]["AnswerQuestionDto"];
+            };
+        };
+        responses: {
+            200: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["OrderLifeDto"];
                 };
             };
             /** @description what went wrong (RFC 9457) */

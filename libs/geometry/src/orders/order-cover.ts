@@ -1,5 +1,6 @@
 import { z } from 'zod';
 import { COVER_PARTS } from '../cloth/cover-panels.ts';
+import { CUSHION_SETTINGS, type CushionSettings } from '../cushions/cushion-settings.ts';
 
 /** Most cloths of one order. */
 export const MAX_COVERS = 12;
@@ -71,10 +72,18 @@ export const orderCoversSchema = z
 
 export type OrderCover = z.infer<typeof orderCoverSchema>;
 
-/** A cloth of which nothing is known but its name: 54 in, plain, bought by the eighth of a yard. */
-export const plainCover = (name: string): OrderCover => ({
+/**
+ * A cloth of which nothing is known but its name: plain, bought by the eighth of a yard.
+ *
+ * @param name - of the cloth
+ * @param settings - allowances of the workshop, for its width
+ */
+export const plainCover = (
+  name: string,
+  { clothWidth }: Pick<CushionSettings, 'clothWidth'> = CUSHION_SETTINGS,
+): OrderCover => ({
   name,
-  widthMm: 1371.6,
+  widthMm: clothWidth.valueMm,
   selvedgeMm: 0,
   direction: 'either',
   nap: 'none',

@@ -1,8 +1,8 @@
-import { CUSHION_SETTINGS, type CushionSettings } from '../cushions/cushion-settings.ts';
 import type { ButtonColumn, CushionDatum, CushionGroup, CushionSpec } from '../cushions/cushion-spec.ts';
 import { OFF_JOINT_MM, type CushionWarning } from '../cushions/cushion-warnings.ts';
 import { foamOfCushion } from '../cushions/foam-of-cushion.ts';
 import { groupCushions } from '../cushions/group-cushions.ts';
+import { keptCushionRules, type CushionRules } from '../cushions/workshop-cushions.ts';
 import { outlineExtent } from '../outlines/outline.ts';
 import { clothOfOrder, coverFaults, type ClothOfOrder } from './order-cloth.ts';
 import type { OrderCover } from './order-cover.ts';
@@ -53,22 +53,23 @@ export interface OrderModel {
 /**
  * The model of an order.
  *
- * @param input - its cushions, its cloths, and the allowances it was issued with
+ * @param input - its cushions, its cloths, and the allowances and foams it was issued with
  * @returns plain data; the same for the same input
  */
 export function orderModel(input: {
   cushions: readonly CushionSpec[];
   covers: readonly OrderCover[];
-  settings?: CushionSettings;
+  rules?: CushionRules;
 }): OrderModel {
-  const { cushions, covers, settings = CUSHION_SETTINGS } = input;
+  const { cushions, covers } = input;
+  const { settings, foams } = input.rules ?? keptCushionRules(null);
   const byMark = new Map(cushions.map((spec) => [spec.mark, spec]));
   const cloths = covers.map((cover) => clothOfOrder(cover, cushions, settings));
   const schedule = groupCushions(cushions).map((group) => scheduleRow(group, byMark, cloths));
   return {
     schedule,
     cloths,
-    totals: orderTotals(cushions),
+    totals: orderTotals(cushions, foams),
     buttons: schedule.flatMap(({ marks, spec }) =>
       spec.buttons.count > 0 ? [buttonSheet(marks, spec)] : [],
     ),

@@ -1,4 +1,5 @@
 import { outlinePerimeter } from '../outlines/outline.ts';
+import type { FoamGrade } from '../cushions/foam-grades.ts';
 import { foamOfCushion } from '../cushions/foam-of-cushion.ts';
 import type { CushionSpec } from '../cushions/cushion-spec.ts';
 import type { Foam } from '../room/document.ts';
@@ -9,6 +10,8 @@ export const THREAD_PER_SEAM = { ratio: 3, source: 'from memory' } as const;
 /** Foam of one grade and thickness. */
 export interface FoamTotal {
   foam: Foam;
+  /** The grade of that name as the workshop buys it, with its layers and wrap. */
+  grade?: FoamGrade;
   thicknessMm: number;
   marks: string[];
   volumeM3: number;
@@ -39,10 +42,14 @@ const ZIP_GRID_MM = 1;
  * Totals of an order.
  *
  * @param cushions - of the order; what cannot be made as asked counts nothing but itself
+ * @param grades - the workshop's own foams
  */
-export function orderTotals(cushions: readonly CushionSpec[]): OrderTotals {
+export function orderTotals(
+  cushions: readonly CushionSpec[],
+  grades: readonly FoamGrade[] = [],
+): OrderTotals {
   const sum = (of: (spec: CushionSpec) => number) => cushions.reduce((total, spec) => total + of(spec), 0);
-  const foam = foamTotals(cushions);
+  const foam = foamTotals(cushions, grades);
   const seamsMm = sum(sewnMm);
   return {
     cushions: cushions.length,
@@ -70,14 +77,22 @@ function sewnMm({ make, making }: CushionSpec): number {
   return edges / 2 + making.welt.lengthMm;
 }
 
-function foamTotals(cushions: readonly CushionSpec[]): FoamTotal[] {
+function foamTotals(cushions: readonly CushionSpec[], grades: readonly FoamGrade[]): FoamTotal[] {
   const totals = new Map<string, FoamTotal>();
   for (const spec of cushions) {
     const sawn = foamOfCushion(spec);
     if (!sawn || !spec.making) continue;
     const { thicknessMm } = spec.making.foam;
     const key = JSON.stringify([spec.foam, Math.round(thicknessMm * 64)]);
-    const total = totals.get(key) ?? { foam: spec.foam, thicknessMm, marks: [], volumeM3: 0, massKg: 0 };
+    const grade = grades.find(({ name }) => name === spec.foam.grade);
+    const total = totals.get(key) ?? {
+      foam: spec.foam,
+      ...(grade && { grade }),
+      thicknessMm,
+      marks: [],
+      volumeM3: 0,
+      massKg: 0,
+    };
     totals.set(key, {
       ...total,
       marks: [...total.marks, spec.mark],

@@ -9,6 +9,7 @@ import { PopulationsAndStudies1796161490650 } from './1796161490650-populations-
 import { AgeOfCastMembers1796165200000 } from './1796165200000-age-of-cast-members';
 import { DimensionSearches1796170200000 } from './1796170200000-dimension-searches';
 import { LifeOfAnOrder1796201340000 } from './1796201340000-life-of-an-order';
+import { CushionSettings1796202960000 } from './1796202960000-cushion-settings';
 
 /** In the order in which they run. What is merged is never changed. */
 export const MIGRATIONS: (new () => MigrationInterface)[] = [
@@ -22,4 +23,5 @@ export const MIGRATIONS: (new () => MigrationInterface)[] = [
   AgeOfCastMembers1796165200000,
   DimensionSearches1796170200000,
   LifeOfAnOrder1796201340000,
+  CushionSettings1796202960000,
 ];

@@ -1,5 +1,5 @@
 import type { FitSheet } from '@settlewright/anthropometry';
-import type { SetDocument } from '@settlewright/geometry';
+import type { CushionRules, SetDocument } from '@settlewright/geometry';
 import {
   Column,
   CreateDateColumn,
@@ -50,6 +50,10 @@ export class SetRevision {
 
   @Column('jsonb')
   counts: Counts;
+
+  /** What its cushions are made with; null: issued before workshops had rules of their own, so the usual way. */
+  @Column({ type: 'jsonb', nullable: true })
+  cushionRules: CushionRules | null;
 
   @Column('text')
   note: string;
