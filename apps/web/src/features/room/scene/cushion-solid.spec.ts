@@ -1,52 +1,95 @@
-import { ARRANGEMENTS, deriveParts } from '@settlewright/geometry';
+import { ARRANGEMENTS, deriveParts, type SetDocument } from '@settlewright/geometry';
 import { describe, expect, it } from 'vitest';
-import { addCushion, isCushion } from './cushion-solid.ts';
+import { addCushion } from './cushion-solid.ts';
 import type { SeatPrint } from './seat-print.ts';
 import type { SolidArrays } from './solid-arrays.ts';
+import { softPart, type SoftPart } from './soft-part.ts';
 import { mergeParts } from './solids.ts';
-import { cross, dot, partAxes, subtract } from './vectors.ts';
+import { add, cross, dot, scale, subtract } from './vectors.ts';
 
-const document = ARRANGEMENTS.find(({ id }) => id === 'banquette')!.build();
-const cushion = deriveParts(document)
-  .filter(isCushion)
-  .find(({ role }) => role === 'seat-cushion')!;
-const [, thick] = cushion.solid.sizeMm;
-const topMm = cushion.positionMm[1] + thick / 2;
+const bench = ARRANGEMENTS.find(({ id }) => id === 'banquette')!.build();
+const curvedBench: SetDocument = {
+  ...bench,
+  pieces: bench.pieces.map((piece) =>
+    piece.kind === 'bench' ? { ...piece, lumbar: { apexMm: 200, recessMm: 25 } } : piece,
+  ),
+};
+const softOf = (document: SetDocument, kind: SoftPart['kind']) =>
+  deriveParts(document)
+    .flatMap((part) => softPart(part) ?? [])
+    .find((soft) => soft.kind === kind)!;
+const seat = softOf(bench, 'seat');
+const back = softOf(bench, 'back');
+const pad = softOf(curvedBench, 'back');
+const topMm = seat.centre[1] + seat.thickMm / 2;
 const empty = () => mergeParts([]);
 
 /** Somebody in the middle of the cushion, thighs along it, 30 mm into it. */
 const print: SeatPrint = {
-  origin: [cushion.positionMm[0], topMm - 30, cushion.positionMm[2]],
+  origin: [seat.centre[0], topMm - 30, seat.centre[2]],
   up: [0, 1, 0],
   stretches: [
     {
-      from: [cushion.positionMm[0], topMm - 30 + 80, cushion.positionMm[2] - 60],
-      to: [cushion.positionMm[0], topMm - 30 + 80, cushion.positionMm[2] + 60],
+      from: [seat.centre[0], topMm - 30 + 80, seat.centre[2] - 60],
+      to: [seat.centre[0], topMm - 30 + 80, seat.centre[2] + 60],
       radii: [80, 80],
     },
   ],
+  backs: [],
 };
 
-function heights(prints: readonly SeatPrint[]) {
+/** Somebody who leans on the middle of a back and reaches 20 mm into it. */
+const leaning = (soft: SoftPart): SeatPrint => ({
+  ...print,
+  backs: [
+    {
+      centre: add(soft.centre, scale(soft.outward, soft.thickMm / 2 + 100)),
+      axes: [soft.across, scale(soft.down, -1), soft.outward],
+      radii: [170, 200, 120],
+    },
+  ],
+});
+
+function drawn(soft: SoftPart, prints: readonly SeatPrint[] = []) {
   const out = empty();
-  addCushion(out, cushion, 2, prints);
+  addCushion(out, soft, 2, prints);
   return out;
 }
 
+/** Points of a drawn cushion from its middle: across, outwards, down. */
+const from = (soft: SoftPart, { positions }: SolidArrays) =>
+  positions.flatMap((x, n) => {
+    if (n % 3 !== 0) return [];
+    const gap = subtract([x, positions[n + 1]!, positions[n + 2]!], soft.centre);
+    return [[dot(gap, soft.across), dot(gap, soft.outward), dot(gap, soft.down)] as const];
+  });
+/** Points of the panel near one of its own. */
+const panelAt = (soft: SoftPart, out: SolidArrays, across: number, down: number) =>
+  from(soft, out)
+    .filter(([u, , v]) => Math.abs(u - across) < 40 && Math.abs(v - down) < 40)
+    .map(([, outward]) => outward);
+
 describe('a cushion', () => {
-  it('stays inside its box and has its crown at the measured height', () => {
-    const { positions } = heights([]);
-    const up = partAxes(cushion.rotationRad)[1];
-    const over = positions.flatMap((x, n) =>
-      n % 3 === 0 ? [dot(up, subtract([x, positions[n + 1]!, positions[n + 2]!], cushion.positionMm))] : [],
-    );
-    expect(Math.max(...over)).toBeCloseTo(thick / 2, 1);
-    expect(Math.min(...over)).toBeCloseTo(-thick / 2, 3);
+  it.each([
+    ['seat', seat],
+    ['back', back],
+    ['curved back', pad],
+  ])('stays inside its box and has its crown at the measured height: %s', (_, soft) => {
+    const over = from(soft, drawn(soft)).map(([, outward]) => outward);
+    expect(Math.max(...over)).toBeGreaterThan(soft.thickMm / 2 - 1.5);
+    expect(Math.max(...over)).toBeLessThan(soft.thickMm / 2 + 0.01);
+    expect(Math.min(...over)).toBeCloseTo(-soft.thickMm / 2, 3);
   });
 
   it('looks outwards with every triangle', () => {
-    for (const prints of [[], [print]]) {
-      const { positions, normals } = heights(prints);
+    for (const [soft, prints] of [
+      [seat, []],
+      [seat, [print]],
+      [back, [leaning(back)]],
+      [pad, []],
+      [pad, [leaning(pad)]],
+    ] as const) {
+      const { positions, normals } = drawn(soft, prints);
       for (let n = 0; n < positions.length; n += 9) {
         const corner = (at: number) =>
           [positions[n + at]!, positions[n + at + 1]!, positions[n + at + 2]!] as const;
@@ -58,18 +101,39 @@ describe('a cushion', () => {
     }
   });
 
+  it('is hollow where a curved back gives way, and full at its apex', () => {
+    const out = drawn(pad);
+    const low = Math.min(
+      ...panelAt(pad, out, 0, pad.lengthMm / 2 - 90).filter((w) => w > -pad.thickMm / 2 + 1),
+    );
+    const high = Math.max(...panelAt(pad, out, 0, 0));
+    expect(pad.thickMm / 2 - low).toBeGreaterThan(15);
+    expect(pad.thickMm / 2 - high).toBeLessThan(2);
+  });
+
+  it('goes in under a back that leans on it, and nowhere far from there', () => {
+    for (const soft of [back, pad]) {
+      const leant = drawn(soft, [leaning(soft)]);
+      const deepest = Math.min(...panelAt(soft, leant, 0, 0).filter((w) => w > -soft.thickMm / 2 + 1));
+      expect(soft.thickMm / 2 - deepest).toBeGreaterThan(20);
+      expect(soft.thickMm / 2 - deepest).toBeLessThan(24);
+      const beside = Math.max(...panelAt(soft, leant, 330, 0));
+      expect(soft.thickMm / 2 - beside).toBeLessThan(2);
+    }
+  });
+
   it('goes down under a sitter by the sink of that sitter, and nowhere far from there', () => {
-    const pressed = heights([print]);
+    const pressed = drawn(seat, [print]);
     const near = (out: SolidArrays, x: number) =>
       out.positions.flatMap((value, n) =>
         n % 3 === 0 &&
         Math.abs(value - x) < 40 &&
-        Math.abs(out.positions[n + 2]! - cushion.positionMm[2]) < 40 &&
+        Math.abs(out.positions[n + 2]! - seat.centre[2]) < 40 &&
         out.normals[n + 1]! > 0.5
           ? [out.positions[n + 1]!]
           : [],
       );
-    expect(Math.min(...near(pressed, cushion.positionMm[0]))).toBeCloseTo(topMm - 30, 0);
-    expect(Math.min(...near(pressed, cushion.positionMm[0] + 350))).toBeGreaterThan(topMm - 1);
+    expect(Math.min(...near(pressed, seat.centre[0]))).toBeCloseTo(topMm - 30, 0);
+    expect(Math.min(...near(pressed, seat.centre[0] + 350))).toBeGreaterThan(topMm - 1);
   });
 });

@@ -1,26 +1,24 @@
-import type { Part, Vec3 } from '@settlewright/geometry';
+import type { Vec3 } from '@settlewright/geometry';
+import { leanedInBy } from './back-print.ts';
 import { pressedBy, type SeatPrint } from './seat-print.ts';
+import type { SoftPart } from './soft-part.ts';
 import type { SolidArrays } from './solid-arrays.ts';
-import { add, cross, dot, normalise, partAxes, scale, subtract } from './vectors.ts';
+import { add, cross, dot, normalise, scale, subtract } from './vectors.ts';
 
 /** Edge of the cover, its crown over the panel and the width over which the crown rises, mm. */
 const ROUND_MM = 20;
 const CROWN_MM = 9;
 const CROWN_RUN_MM = 150;
-/** Distance of the lines of a panel: close where somebody sits on it, mm. */
+/** Distances of the lines of a panel: close where somebody sits or leans on it and down a curve, mm. */
 const PRESSED_STEP_MM = 32;
+const LEANED_STEP_MM = 48;
+const CURVED_STEP_MM = 26;
 const FREE_STEP_MM = 240;
 /** A pressed panel stays so far over the deck, mm. */
 const LEAST_MM = 8;
 const ROUNDING = [1, 0.92, 0.6, 0] as const;
 
 type Sheet = Vec3[][];
-
-const isSoft = ({ role }: Part): boolean => role === 'seat-cushion' || role === 'back-cushion';
-
-/** A cushion that is drawn soft. */
-export const isCushion = (part: Part): part is Part & { solid: { shape: 'box'; sizeMm: Vec3 } } =>
-  isSoft(part) && part.solid.shape === 'box';
 
 /** Lines across a panel of half width `half`: close at the rounded edges. */
 function lines(half: number, round: number, step: number): number[] {
@@ -92,30 +90,38 @@ function addLoop(out: SolidArrays, loop: readonly Vec3[], weight: number) {
   });
 }
 
+/** How far the panel of a cushion goes in at a point of its free face. */
+type Press = (point: Vec3) => number;
+
+function pressOf(prints: readonly SeatPrint[], { kind, outward }: SoftPart): Press {
+  if (kind === 'seat') return (point) => pressedBy(prints, point);
+  const backs = prints.flatMap((print) => print.backs);
+  const inward = scale(outward, -1);
+  return (point) => leanedInBy(backs, point, inward);
+}
+
+/** Distances of the lines across and down a panel. */
+function stepsOf({ kind, hollowAt }: SoftPart, prints: readonly SeatPrint[]): [number, number] {
+  if (prints.length === 0) return [FREE_STEP_MM, hollowAt ? CURVED_STEP_MM : FREE_STEP_MM];
+  return kind === 'seat' ? [PRESSED_STEP_MM, PRESSED_STEP_MM] : [LEANED_STEP_MM, LEANED_STEP_MM];
+}
+
 /**
  * A cushion as it is upholstered: a crowned panel over a boxing with a welt between, all inside the measured box, and
- * pressed in where somebody sits. The seat's panel looks up, the back's forwards.
+ * pressed in where somebody sits or leans. The seat's panel looks up, the back's forwards.
  */
-export function addCushion(
-  out: SolidArrays,
-  part: Part & { solid: { sizeMm: Vec3 } },
-  material: number,
-  prints: readonly SeatPrint[],
-) {
-  const [x, y, z] = partAxes(part.rotationRad);
-  const isSeat = part.role === 'seat-cushion';
-  const [width, height, depth] = part.solid.sizeMm;
-  const thick = isSeat ? height : depth;
-  const [a, b] = [width / 2, (isSeat ? depth : height) / 2];
-  const [outward, down]: [Vec3, Vec3] = isSeat ? [y, z] : [z, scale(y, -1)];
+export function addCushion(out: SolidArrays, soft: SoftPart, material: number, prints: readonly SeatPrint[]) {
+  const { centre, across, outward, down, thickMm: thick, hollowAt } = soft;
+  const [a, b] = [soft.widthMm / 2, soft.lengthMm / 2];
   const round = Math.min(ROUND_MM, thick * 0.35, a * 0.4, b * 0.4);
   const crown = Math.min(CROWN_MM, thick * 0.12);
-  const step = prints.length > 0 && isSeat ? PRESSED_STEP_MM : FREE_STEP_MM;
+  const [stepAcross, stepDown] = stepsOf(soft, prints);
+  const press = pressOf(prints, soft);
   const place = (u: number, w: number, v: number): Vec3 =>
-    add(part.positionMm, add(add(scale(x, u), scale(outward, w)), scale(down, v)));
+    add(centre, add(add(scale(across, u), scale(outward, w)), scale(down, v)));
 
-  const panel: Sheet = lines(b, round, step).map((v) =>
-    lines(a, round, step).map((u) => {
+  const panel: Sheet = lines(b, round, stepDown).map((v) =>
+    lines(a, round, stepAcross).map((u) => {
       const [eu, ev] = [
         Math.max(0, Math.abs(u) - a + round) / round,
         Math.max(0, Math.abs(v) - b + round) / round,
@@ -124,20 +130,19 @@ export function addCushion(
       const inward = Math.min(a - Math.abs(u), b - Math.abs(v)) / CROWN_RUN_MM;
       const sag = crown * (1 - Math.min(1, inward)) ** 2;
       const rise = round * Math.sqrt(Math.max(0, 1 - du * du - dv * dv));
-      const top = thick / 2 - round + rise - sag;
       const at: readonly [number, number] = [
         eu > 0 ? Math.sign(u) * (a - round + round * du) : u,
         ev > 0 ? Math.sign(v) * (b - round + round * dv) : v,
       ];
-      const pressed = isSeat ? pressedBy(prints, place(at[0], top, at[1])) : 0;
-      return place(at[0], Math.max(LEAST_MM - thick / 2, top - pressed), at[1]);
+      const top = thick / 2 - round + rise - sag - (hollowAt?.(at[1]) ?? 0);
+      return place(at[0], Math.max(LEAST_MM - thick / 2, top - press(place(at[0], top, at[1]))), at[1]);
     }),
   );
   addSheet(out, panel, normalsOf(panel), material);
 
   const rim = rimOf(panel);
   const foot = rim.map((point) =>
-    add(point, scale(outward, -thick / 2 - dot(subtract(point, part.positionMm), outward))),
+    add(point, scale(outward, -thick / 2 - dot(subtract(point, centre), outward))),
   );
   const sideways = rim.map((_, n) => {
     const run = subtract(rim[n + 1] ?? rim[1]!, rim[n - 1] ?? rim.at(-2)!);

@@ -12,6 +12,7 @@ const print: SeatPrint = {
   origin: [0, 400, 200],
   up: [0, 1, 0],
   stretches: [{ from: [0, 480, 100], to: [0, 480, 300], radii: [80, 80] }],
+  backs: [],
 };
 
 describe('solids of pieces', () => {

@@ -1,4 +1,5 @@
 import type { MannequinPose, Vec3 } from '@settlewright/geometry';
+import { backPrintsOf, type BackPrint } from './back-print.ts';
 import type { SeatedBody } from '../picture.ts';
 import { add, dot, mix, partAxes, scale, subtract } from './vectors.ts';
 
@@ -9,12 +10,14 @@ interface Stretch {
   radii: readonly [number, number];
 }
 
-/** What one sitter presses into a cushion. */
+/** What one sitter presses into the cushions of a piece. */
 export interface SeatPrint {
   /** Point and upward normal of the pressed seat. */
   origin: Vec3;
   up: Vec3;
   stretches: Stretch[];
+  /** What leans on the back. */
+  backs: BackPrint[];
 }
 
 /** Cloth follows the body this far inside its outline and is level again this far outside, mm. */
@@ -24,7 +27,7 @@ const NONE: readonly SeatPrint[] = [];
 
 const known = new WeakMap<MannequinPose, SeatPrint>();
 
-/** The underside of pelvis and thighs; made once for a pose and forgotten with it. */
+/** The underside of pelvis and thighs, and the trunk; made once for a pose and forgotten with it. */
 export function seatPrintOf(pose: MannequinPose): SeatPrint {
   const before = known.get(pose);
   if (before) return before;
@@ -46,7 +49,7 @@ export function seatPrintOf(pose: MannequinPose): SeatPrint {
     if (!/thigh/.test(segment.name)) return [];
     return [{ from: segment.fromMm, to: segment.toMm, radii: [segment.fromRadiusMm, segment.toRadiusMm] }];
   });
-  const print = { origin: originMm, up, stretches };
+  const print = { origin: originMm, up, stretches, backs: backPrintsOf(pose) };
   known.set(pose, print);
   return print;
 }

@@ -1,7 +1,8 @@
 import type { MaterialKey, Part, Solid, Vec3 } from '@settlewright/geometry';
 import { BufferAttribute, BufferGeometry, ShapeUtils, Vector2 } from 'three';
-import { addCushion, isCushion } from './cushion-solid';
+import { addCushion } from './cushion-solid';
 import type { SeatPrint } from './seat-print';
+import { softPart } from './soft-part';
 import type { SolidArrays } from './solid-arrays';
 import { grainsOf } from './timber';
 import { add, normalise, partAxes, scale } from './vectors';
@@ -127,7 +128,8 @@ export function mergeParts(
     const material = MATERIALS.indexOf(part.material);
     const weight = SEAMS[part.role] ?? 1;
     const start = out.positions.length;
-    if (isCushion(part)) addCushion(out, part, material, printsOn(part.pieceId));
+    const soft = softPart(part);
+    if (soft) addCushion(out, soft, material, printsOn(part.pieceId));
     else if (part.solid.shape === 'box') addBox(out, part, part.solid.sizeMm, material, weight);
     else if (part.solid.shape === 'cylinder') {
       addCylinder(out, part, part.solid.radiusMm, part.solid.heightMm, material);
