@@ -1,6 +1,7 @@
 import type { SetDocument } from '@settlewright/geometry';
 import { afterEach, beforeEach, describe, expect, it, vi } from 'vitest';
-import { createRoomStore, drawnDocument, REST_MS, settledDocument, shownDocument, undoNames } from './store';
+import { createRoomStore, drawnDocument, settledDocument, shownDocument, undoNames } from './store';
+import { REST_MS } from './rest';
 
 const set = (note: string): SetDocument => ({
   schemaVersion: 1,
@@ -59,19 +60,19 @@ describe('a hand that moves', () => {
     const first = set('first');
     const store = createRoomStore(first);
     store.getState().showMoving(set('way'));
-    vi.advanceTimersByTime(REST_MS - 1);
+    vi.advanceTimersByTime(REST_MS);
     store.getState().showMoving(set('there'));
-    vi.advanceTimersByTime(REST_MS - 1);
+    vi.advanceTimersByTime(REST_MS);
     expect(drawnDocument(store.getState())).toEqual(set('there'));
     expect(shownDocument(store.getState())).toBe(first);
-    vi.advanceTimersByTime(1);
+    vi.runAllTimers();
     expect(shownDocument(store.getState())).toEqual(set('there'));
     expect(store.getState().document).toBe(first);
     store.getState().showMoving(set('on'));
     expect(shownDocument(store.getState())).toEqual(set('there'));
     store.getState().showPreview(null);
     expect(drawnDocument(store.getState())).toBe(first);
-    vi.advanceTimersByTime(REST_MS);
+    vi.runAllTimers();
     expect(shownDocument(store.getState())).toBe(first);
   });
 
@@ -84,7 +85,7 @@ describe('a hand that moves', () => {
     expect(store.getState().document).toEqual(set('two'));
     expect(settledDocument(store.getState())).toBe(first);
     expect(store.temporal.getState().pastStates).toHaveLength(2);
-    vi.advanceTimersByTime(REST_MS);
+    vi.runAllTimers();
     expect(shownDocument(store.getState())).toEqual(set('two'));
     expect(store.getState().preview).toBeNull();
     expect(counted).toHaveBeenCalledExactlyOnceWith(first);
@@ -95,7 +96,7 @@ describe('a hand that moves', () => {
     const counted = vi.fn();
     store.getState().commitMoving(set('one'), 'Moved', counted);
     store.getState().commit(set('two'), 'Seat 18″ to 17″');
-    vi.advanceTimersByTime(REST_MS);
+    vi.runAllTimers();
     expect(counted).not.toHaveBeenCalled();
     expect(shownDocument(store.getState())).toEqual(set('two'));
   });

@@ -2,10 +2,9 @@ import type { SetDocument } from '@settlewright/geometry';
 import { createContext, useContext } from 'react';
 import { temporal, type TemporalState } from 'zundo';
 import { createStore, useStore, type StoreApi } from 'zustand';
+import { createRest } from './rest.ts';
 
 const UNDO_STEPS = 200;
-/** A hand that has been still for so long rests: everything is counted then. */
-export const REST_MS = 150;
 
 interface UndoStep {
   document: SetDocument;
@@ -46,17 +45,16 @@ const STILL = { moving: null, counted: null };
 
 /** The one store of a set's page. Documents change by `commit` alone: one call, one undo step. */
 export function createRoomStore(document: SetDocument): RoomStore {
-  let resting: ReturnType<typeof setTimeout> | undefined;
   let began = document;
   let atRest: ((before: SetDocument) => void) | undefined;
   /** Says where a movement began, and that it goes on. */
   function move(state: RoomState, next: SetDocument): Pick<RoomState, 'moving' | 'counted'> {
     if (!state.moving) began = state.document;
     atRest = undefined;
-    clearTimeout(resting);
-    resting = setTimeout(() => state.rest(), REST_MS);
+    resting.go();
     return { moving: next, counted: shownDocument(state) };
   }
+  const resting = createRest(() => store.getState().rest());
   const store = createStore<RoomState>()(
     temporal(
       (set, get) => ({
@@ -74,7 +72,7 @@ export function createRoomStore(document: SetDocument): RoomStore {
         showPreview: (preview) => set({ preview, ...STILL }),
         showMoving: (moving) => set(move(get(), moving)),
         rest: () => {
-          clearTimeout(resting);
+          resting.stop();
           const { moving } = get();
           if (!moving) return;
           set({ preview: moving === get().document ? null : moving, ...STILL });
