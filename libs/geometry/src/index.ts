@@ -6,6 +6,7 @@ export * from './units/format-length.ts';
 export * from './units/spoken-length.ts';
 export * from './units/angle.ts';
 export * from './units/mass.ts';
+export { foamNumber, foamText, foamUnit, fromFoamNumber } from './units/foam-units.ts';
 export * from './parts/part.ts';
 export * from './parts/placement.ts';
 export * from './parts/boards.ts';

@@ -1,4 +1,5 @@
 import { z } from 'zod';
+import { KG_M3_PER_LB_FT3, NEWTON_PER_LBF } from '../units/foam-units.ts';
 import { MM_PER_INCH } from '../units/length-style.ts';
 import type { SettingSource } from './cushion-settings.ts';
 
@@ -30,9 +31,6 @@ export const foamGradeSchema = z.strictObject({
 });
 
 export type FoamGrade = z.infer<typeof foamGradeSchema>;
-
-const NEWTON_PER_LBF = 4.4482216;
-const KG_M3_PER_LB_FT3 = 16.018463;
 
 const preset = (
   name: string,

@@ -5,6 +5,7 @@ import { RuleHeading } from '@/components/rule-heading.tsx';
 import { usePageTitle } from '@/lib/page-title.ts';
 import { sayProblem } from '@/lib/problem.ts';
 import { useWorkshop, useWorkshopSettings } from '@/lib/workshop.ts';
+import { CushionSettings } from '../cushions/cushion-settings.tsx';
 import { ConfidenceForm } from './confidence-form.tsx';
 import { Members } from './members.tsx';
 import { SettingsForm } from './settings-form.tsx';
@@ -21,6 +22,7 @@ export function WorkshopPage() {
         <div className="grid grid-cols-[minmax(0,1fr)] gap-10">
           <Members workshop={workshop} />
           <Upholsterers workshop={workshop} />
+          <CushionSettings workshop={workshop} />
         </div>
         <div className="grid grid-cols-[minmax(0,1fr)] gap-10">
           <section>
