@@ -3,8 +3,15 @@ import { readFigure } from '../mannequin/figure.ts';
 import type { JointRanges, JointSweep } from '../mannequin/joint-ranges.ts';
 import { legLine } from '../mannequin/leg-sections.ts';
 import type { MannequinPose } from '../mannequin/pose.ts';
-import { armLinks, bendPoint, chestRad, kneeRadius, mirror, restShoulder } from '../mannequin/stance.ts';
-import { add, scale, sub, turnAboutX, turnAboutY } from '../mannequin/vector.ts';
+import {
+  bendPoint,
+  chestRad,
+  kneeRadius,
+  mirror,
+  restElbowFlesh,
+  restShoulder,
+} from '../mannequin/stance.ts';
+import { add, length, scale, sub, turnAboutX, turnAboutY } from '../mannequin/vector.ts';
 import type { Part, Vec3 } from '../parts/part.ts';
 import { gapBetween, type Gap } from './gap.ts';
 import { hullOfBalls, type Shape } from './shape.ts';
@@ -52,7 +59,8 @@ export function jointEnvelopes(pose: MannequinPose, { sweeps }: JointRanges): Jo
   const f = readFigure(pose.means);
   const { stance, placement } = pose;
   const shoulder = bendPoint(f, stance, restShoulder(f));
-  const { upperMm } = armLinks(f);
+  // What is swept is the flesh of the elbow, round its middle.
+  const upperMm = length(sub(restElbowFlesh(f), restShoulder(f)));
   const { hip, knee } = legLine(f, stance);
   const elbowAt = (forwards: number, outwards: number): Vec3 => {
     const out: Vec3 = [Math.sin(outwards), -Math.cos(outwards), 0];

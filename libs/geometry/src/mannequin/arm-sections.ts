@@ -2,11 +2,11 @@ import type { Vec3 } from '../parts/part.ts';
 import { LIMB_COLUMNS, type Cage } from './cage.ts';
 import type { Figure } from './figure.ts';
 import {
-  armLinks,
   bicepsTuck,
-  direction,
   bendPoint,
   chestRad,
+  direction,
+  elbowFlesh,
   mirror,
   shoulderLineMm,
   type ArmStance,
@@ -19,6 +19,7 @@ import {
   clamp,
   cross,
   dot,
+  length,
   mix,
   mixPoints,
   scale,
@@ -42,7 +43,10 @@ function armRing(centre: Vec3, outward: Vec3, front: Vec3, behind = 1): Vec3[] {
 /** Section points of a left arm. Ring 0 is the armhole, given hanging and leaned with the trunk. */
 function armPoints(f: Figure, arm: ArmStance, bend: TrunkBend, armhole: Vec3[]) {
   const { k, radius, Ha } = f;
-  const { shoulder, elbow, wrist } = arm;
+  const { shoulder, wrist } = arm;
+  const elbow = elbowFlesh(f, arm);
+  const upperMm = length(sub(elbow, shoulder));
+  const forearmMm = length(sub(wrist, elbow));
   const u = direction(shoulder, elbow);
   const g = direction(elbow, wrist);
   const hangLateral: Vec3 = [1, 0, 0];
@@ -71,11 +75,10 @@ function armPoints(f: Figure, arm: ArmStance, bend: TrunkBend, armhole: Vec3[]) 
 
   const r = radius.arm;
   const e = radius.elbow;
-  const links = armLinks(f);
   const tuck = bicepsTuck(f);
   const bent = clamp(Math.acos(clamp(dot(u, g), -1, 1)) / (Math.PI / 2), 0, 1);
   const front = frontOf(u, lateral);
-  const onUpper = (t: number): Vec3 => along(shoulder, u, t * links.upperMm);
+  const onUpper = (t: number): Vec3 => along(shoulder, u, t * upperMm);
   const biceps = armRing(
     along(onUpper(0.52), lateral, -tuck),
     scale(lateral, 0.96 * r),
@@ -93,11 +96,7 @@ function armPoints(f: Figure, arm: ArmStance, bend: TrunkBend, armhole: Vec3[]) 
   const handBack = unit(cross(arm.hand, handSide));
   const onForearm = (t: number, twist: number, across: number, through: number): Vec3[] => {
     const side = unit(mixPoints(lateral, handSide, twist), lateral);
-    return armRing(
-      along(elbow, g, t * links.forearmMm),
-      scale(side, across),
-      scale(frontOf(g, side), through),
-    );
+    return armRing(along(elbow, g, t * forearmMm), scale(side, across), scale(frontOf(g, side), through));
   };
   const below = onForearm(mix(0.26, 0.4, bent), 0.12, radius.forearm, radius.forearm);
   const atWrist = onForearm(1, 0.85, 1.12 * radius.wrist, 0.86 * radius.wrist);

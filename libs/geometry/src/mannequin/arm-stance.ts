@@ -6,6 +6,7 @@ import { thighSurface } from './leg-sections.ts';
 import {
   armLinks,
   bendPoint,
+  elbowFlesh,
   measuringStance,
   restKnee,
   restShoulder,
@@ -38,7 +39,8 @@ function bestReach(f: Figure, bend: TrunkBend, wishes: Wish[], rest?: Rest): Rea
       const least = atLeast + step * SWIVEL_STEP_RAD;
       if (best && least >= best.cost) break;
       const reach = reachFor(shoulder, wrist, upperMm, forearmMm, POLE, step * SWIVEL_STEP_RAD);
-      const cost = least + overlap(reach.middle, reach.end, among);
+      const flesh = elbowFlesh(f, { shoulder, elbow: reach.middle, wrist: reach.end });
+      const cost = least + overlap(flesh, reach.end, among);
       if (!best || cost < best.cost) best = { reach, cost };
     }
   }

@@ -2,10 +2,10 @@ import type { Vec3 } from '../parts/part.ts';
 import type { Figure } from './figure.ts';
 import { SOFT, type SkinLevel } from './skin.ts';
 import {
-  armLinks,
   bendPoint,
   bicepsTuck,
   direction,
+  elbowFlesh,
   waistPivot,
   type ArmStance,
   type Stance,
@@ -31,11 +31,13 @@ const cone = (from: Vec3, to: Vec3, fromRadius: number, toRadius: number): Cone 
 /** Rounded cones that hold a left arm from under the armpit to the fingers. */
 function armCones(f: Figure, arm: ArmStance): Cone[] {
   const { radius, Ha } = f;
-  const { shoulder, elbow, wrist } = arm;
+  const { shoulder, wrist } = arm;
+  const elbow = elbowFlesh(f, arm);
   const u = direction(shoulder, elbow);
   const g = direction(elbow, wrist);
   const lateral = unit(cross(g, u), [1, 0, 0]);
-  const { upperMm, forearmMm } = armLinks(f);
+  const upperMm = length(sub(elbow, shoulder));
+  const forearmMm = length(sub(wrist, elbow));
   const biceps = along(along(shoulder, u, 0.52 * upperMm), lateral, -bicepsTuck(f));
   const armpit = along(shoulder, u, 0.25 * upperMm);
   const below = along(elbow, g, 0.36 * forearmMm);

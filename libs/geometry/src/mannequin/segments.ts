@@ -3,17 +3,17 @@ import { toRoom, type BodyPlacement } from './body-placement.ts';
 import type { Figure } from './figure.ts';
 import { legLine, thighRings } from './leg-sections.ts';
 import {
-  armLinks,
   bendPoint,
   bicepsTuck,
   chestRad,
   direction,
+  elbowFlesh,
   HIP_FORWARD_MM,
   HIP_HEIGHT_MM,
   kneeRadius,
   mirror,
   restAnkle,
-  restElbow,
+  restElbowFlesh,
   restKnee,
   restShoulder,
   shoulderLineMm,
@@ -21,7 +21,7 @@ import {
   type Stance,
 } from './stance.ts';
 import { chestFront, chestHalf, chestHeight, trunkLevels } from './trunk-profile.ts';
-import { add, along, clamp, cross, mix, sub, turnAboutX, turnAboutY, unit } from './vector.ts';
+import { add, along, clamp, cross, length, mix, sub, turnAboutX, turnAboutY, unit } from './vector.ts';
 
 /** What a stretch of the body wears. */
 export type MannequinTag = 'head' | 'hand' | 'shoe' | 'suit';
@@ -106,14 +106,15 @@ function legStretches(f: Figure, stance: Stance): Stretch[] {
 
 /** Solids of a left arm: shoulder, elbow and fingertips lie where the skin has them. */
 function armStretches(f: Figure, arm: ArmStance): Stretch[] {
-  const u = direction(arm.shoulder, arm.elbow);
-  const lateral = unit(cross(direction(arm.elbow, arm.wrist), u), [1, 0, 0]);
+  const flesh = elbowFlesh(f, arm);
+  const u = direction(arm.shoulder, flesh);
+  const lateral = unit(cross(direction(flesh, arm.wrist), u), [1, 0, 0]);
   const { radius, Ha } = f;
   const flush = bicepsTuck(f) + 0.11 * (f.FF - f.BD);
-  const middle = along(along(arm.shoulder, u, 0.52 * armLinks(f).upperMm), lateral, -flush);
+  const middle = along(along(arm.shoulder, u, 0.52 * length(sub(flesh, arm.shoulder))), lateral, -flush);
   const biceps: Ball = [middle, 0.96 * radius.arm];
   // The tip of the elbow lies a little beyond its centre.
-  const elbow: Ball = [along(arm.elbow, u, restElbow(f)[1] - f.ER - radius.elbow), radius.elbow];
+  const elbow: Ball = [along(flesh, u, restElbowFlesh(f)[1] - f.ER - radius.elbow), radius.elbow];
   return [
     ['suit', 'shoulder', [arm.shoulder, f.BD / 2 - restShoulder(f)[0]], biceps],
     ['suit', 'upper arm', biceps, elbow],

@@ -87,23 +87,60 @@ export function restShoulder(f: Figure): Vec3 {
   return [f.BD / 2 - d, 0.935 * f.AH, shoulderLineMm(f)];
 }
 
-/** Centre of the left elbow of an upright trunk with the forearms level. */
-export function restElbow(f: Figure): Vec3 {
+/** Middle of the flesh at the left elbow of an upright trunk with the forearms level. */
+export function restElbowFlesh(f: Figure): Vec3 {
   const e = f.radius.elbow;
   return [f.FF / 2 - e, f.ER + 1.11 * e, shoulderLineMm(f) + 4];
 }
 
+/**
+ * How far the joint of the elbow lies from the middle of the flesh: down the upper arm, and back along the forearm.
+ * The joint is over the tip by as much as the shoulder-elbow length exceeds acromion to radiale, and before its back
+ * by as much as the forearm-hand length exceeds radiale to fingertip.
+ */
+function elbowIn(f: Figure): { downMm: number; backMm: number } {
+  const e = f.radius.elbow;
+  return {
+    downMm: 1.11 * e - mix(OVER_TIP_MM.man, OVER_TIP_MM.woman, f.woman) * f.k,
+    backMm: e - mix(BEFORE_BACK_MM.man, BEFORE_BACK_MM.woman, f.woman) * f.k,
+  };
+}
+const OVER_TIP_MM = { man: 29, woman: 23 };
+const BEFORE_BACK_MM = { man: 22, woman: 19 };
+
+/** Joint of the left elbow of an upright trunk with the forearms level. */
+export function restElbow(f: Figure): Vec3 {
+  const { downMm, backMm } = elbowIn(f);
+  const flesh = restElbowFlesh(f);
+  const shoulder = restShoulder(f);
+  let joint = flesh;
+  for (let i = 0; i < 5; i++) {
+    joint = along(along(flesh, direction(shoulder, joint), downMm), [0, 0, 1], -backMm);
+  }
+  return joint;
+}
+
+/** Middle of the flesh at an elbow: nearer the crook than the joint, the more so the more it is bent. */
+export function elbowFlesh(
+  f: Figure,
+  { shoulder, elbow, wrist }: Pick<ArmStance, 'shoulder' | 'elbow' | 'wrist'>,
+): Vec3 {
+  const { downMm, backMm } = elbowIn(f);
+  return along(along(elbow, direction(shoulder, elbow), -downMm), direction(elbow, wrist), backMm);
+}
+
 /** Lengths of the arm's links: shoulder to elbow so that the elbow rest comes true, elbow to wrist. */
 export function armLinks(f: Figure): { upperMm: number; forearmMm: number } {
+  const { backMm } = elbowIn(f);
   return {
     upperMm: length(sub(restElbow(f), restShoulder(f))),
-    forearmMm: Math.max(120, f.FHL - f.Ha - f.radius.elbow),
+    forearmMm: Math.max(120, f.FHL - f.Ha - f.radius.elbow + backMm),
   };
 }
 
 /** How far the biceps is drawn inwards so that the arm stays within the breadth of the shoulders. */
 export function bicepsTuck(f: Figure): number {
-  const restOut = mix(restShoulder(f)[0], restElbow(f)[0], 0.52) + 0.96 * f.radius.arm;
+  const restOut = mix(restShoulder(f)[0], restElbowFlesh(f)[0], 0.52) + 0.96 * f.radius.arm;
   return Math.max(0, restOut - (f.BD / 2 + 0.11 * (f.FF - f.BD)));
 }
 

@@ -1,7 +1,7 @@
 import { describe, expect, it } from 'vitest';
 import jointFile from '@settlewright/seed-data/joint-ranges.json' with { type: 'json' };
 import { furthest, LineCaster } from '../../test/mesh-rays.ts';
-import { percentilePeople } from '../../test/survey-like-people.ts';
+import { builds, percentilePeople } from '../../test/survey-like-people.ts';
 import { jointAngles, jointWarnings } from './joint-angles.ts';
 import { readJointRanges } from './joint-ranges.ts';
 import { mannequinMesh } from './mesh.ts';
@@ -31,7 +31,8 @@ describe('a body in the standard posture', () => {
     const seat = means.popliteal_height + SHOE_MM;
     const pose = standard(means);
     const mesh = mannequinMesh(pose);
-    const elbow = pose.joints.leftElbow;
+    const arm = pose.segments.find(({ name }) => name === 'left upper arm');
+    const elbow = arm?.kind === 'rounded-cone' ? arm.toMm : pose.joints.leftElbow;
     const under = new LineCaster(mesh, 1)
       .inside(...elbow)
       .find(({ from, to }) => from < elbow[1] && to > elbow[1])!.from;
@@ -40,7 +41,7 @@ describe('a body in the standard posture', () => {
       1,
       1,
       { axis: 2, from: means.buttock_popliteal_length + 15, to: means.buttock_knee_length },
-      (x, y) => x > 0 && y < seat + 250,
+      (x, y) => x > 0 && y < seat + 200,
     );
     const found = { eye: pose.eyeMm, elbow: under, knee: kneeTop };
     const wanted = {
@@ -53,34 +54,56 @@ describe('a body in the standard posture', () => {
     }
   });
 
-  // Fractions of stature: Drillis and Contini 1966 as tabled in textbooks of biomechanics, and ANSUR II links by sex.
-  // The drawn elbow turns about a point one elbow's radius from its tip, further down the arm than the bone does.
-  const RATIOS = {
-    'acromion to elbow': [0.186, 0.191, 0.1],
-    forearm: [0.146, 0.1525, 0.13],
-    hand: [0.108, 0.1112, 0.08],
+  // Fractions of stature of the arm's links, mean and standard deviation: ANSUR II (NATICK/TR-15/007, public data),
+  // acromion to radiale, radiale to stylion, hand length.
+  const ARM_RATIOS = {
+    women: { 'upper arm': [0.1911, 0.0065], forearm: [0.1482, 0.0068], hand: [0.1112, 0.0047] },
+    men: { 'upper arm': [0.1909, 0.0061], forearm: [0.1525, 0.0061], hand: [0.1101, 0.0042] },
+  } as const;
+  // Thigh, shank and foot: the same survey and Drillis and Contini 1966 as tabled in textbooks of biomechanics.
+  const LEG_RATIOS = {
     thigh: [0.233, 0.245, 0.08],
     shank: [0.2384, 0.2475, 0.08],
     foot: [0.1513, 0.1544, 0.08],
   } as const;
-  it.each(people)('has links in the published proportions: %s', (_, means) => {
+  const linkOf = (means: FigureMeans) => {
     const { joints } = standard(means);
-    const link = (a: keyof typeof joints, b: keyof typeof joints): number =>
-      Math.hypot(...joints[a].map((x, i) => x - joints[b][i]!)) / means.stature;
-    const shares: Record<keyof typeof RATIOS, number> = {
-      'acromion to elbow':
-        Math.hypot(
-          joints.leftElbow[0] - means.biacromial_breadth / 2,
-          joints.leftElbow[1] - means.popliteal_height - SHOE_MM - means.acromial_height_sitting,
-        ) / means.stature,
-      forearm: link('leftElbow', 'leftWrist'),
-      hand: link('leftWrist', 'leftFingertip'),
+    return (a: keyof typeof joints, b: keyof typeof joints): number =>
+      Math.hypot(...joints[a].map((x, i) => x - joints[b][i]!)) / means.stature!;
+  };
+
+  it.each([...people, ...builds()])(
+    'has arms within one deviation of the published ones: %s',
+    (who, means) => {
+      const { joints } = standard(means);
+      const link = linkOf(means);
+      const acromion = [
+        means.biacromial_breadth / 2,
+        means.popliteal_height + SHOE_MM + means.acromial_height_sitting,
+      ];
+      const shares = {
+        'upper arm':
+          Math.hypot(joints.leftElbow[0] - acromion[0]!, joints.leftElbow[1] - acromion[1]!) / means.stature,
+        forearm: link('leftElbow', 'leftWrist'),
+        hand: link('leftWrist', 'leftFingertip'),
+      };
+      const ratios = ARM_RATIOS[who.includes('women') ? 'women' : 'men'];
+      const strays = (Object.keys(shares) as (keyof typeof shares)[]).filter(
+        (name) => Math.abs(shares[name] - ratios[name][0]) > ratios[name][1],
+      );
+      expect(strays.map((name) => `${name} ${shares[name].toFixed(4)}`)).toEqual([]);
+    },
+  );
+
+  it.each(people)('has legs in the published proportions: %s', (_, means) => {
+    const link = linkOf(means);
+    const shares: Record<keyof typeof LEG_RATIOS, number> = {
       thigh: link('pelvis', 'leftKnee'),
       shank: link('leftKnee', 'leftAnkle'),
       foot: link('leftHeel', 'leftToe'),
     };
-    const strays = (Object.keys(RATIOS) as (keyof typeof RATIOS)[]).filter((name) => {
-      const [low, high, within] = RATIOS[name];
+    const strays = (Object.keys(LEG_RATIOS) as (keyof typeof LEG_RATIOS)[]).filter((name) => {
+      const [low, high, within] = LEG_RATIOS[name];
       return shares[name] < (1 - within) * low || shares[name] > (1 + within) * high;
     });
     expect(strays.map((name) => `${name} ${shares[name].toFixed(4)}`)).toEqual([]);
