@@ -6,7 +6,7 @@ import type { Part, Vec3 } from '../parts/part.ts';
 import { gapBetween } from './gap.ts';
 import { sitterDistances } from './sitter-distances.ts';
 import { CONTACT_MM } from './sitter-gap.ts';
-import { skinGap } from './skin-gap.ts';
+import { skinGap, skinsGap } from './skin-gap.ts';
 import { partShape, segmentShape } from './solids.ts';
 
 const ball = (name: string, at: Vec3, r: number): MannequinSegment => ({
@@ -120,5 +120,33 @@ describe('in a real set', () => {
     expect(smallest!.distanceMm).toBeLessThanOrEqual(nearest + 0.01);
     expect(smallest!.distanceMm).toBeGreaterThan(nearest - 3);
     expect(skinGap(withSkin[i]!.mesh, partShape(part))!.distanceMm).toBeCloseTo(smallest!.distanceMm, 3);
+  });
+
+  it('measures two neighbours from skin to skin, the same from either side', () => {
+    const withSkin = bodies.map((one) => ({ ...one, mesh: mannequinMesh(one.pose) }));
+    const onSkin = sitterDistances(withSkin, []);
+    const between = (i: number, j: number): number => {
+      const [a, b] = [withSkin[i]!.mesh.positions, withSkin[j]!.mesh.positions];
+      let least = Infinity;
+      for (let v = 0; v < a.length; v += 3) {
+        for (let w = 0; w < b.length; w += 3) {
+          const apart = (a[v]! - b[w]!) ** 2 + (a[v + 1]! - b[w + 1]!) ** 2 + (a[v + 2]! - b[w + 2]!) ** 2;
+          if (apart < least) least = apart;
+        }
+      }
+      return Math.sqrt(least);
+    };
+    const gap = onSkin[0]!.smallest!;
+    expect(gap.measuredOn).toBe('skin');
+    const j = bodies.findIndex(({ placeId }) => gap.thing.kind === 'body' && placeId === gap.thing.placeId);
+    const corners = between(0, j);
+    expect(gap.distanceMm).toBeLessThanOrEqual(corners + 0.01);
+    expect(gap.distanceMm).toBeGreaterThan(corners - 3);
+    const back = skinsGap(withSkin[j]!.mesh, withSkin[0]!.mesh, 1500)!;
+    expect(back.distanceMm).toBeCloseTo(gap.distanceMm, 2);
+    expect(skinsGap(withSkin[0]!.mesh, withSkin[j]!.mesh, gap.distanceMm - 1)).toBeUndefined();
+    const mesh = withSkin[0]!.mesh;
+    const pushed = { ...mesh, positions: mesh.positions.map((x, n) => (n % 3 === 1 ? x + 20 : x)) };
+    expect(skinsGap(mesh, pushed, 50)).toBeUndefined();
   });
 });

@@ -8,7 +8,7 @@ import {
   type SitterGap,
   type Thing,
 } from './sitter-gap.ts';
-import { skinGap } from './skin-gap.ts';
+import { skinGap, skinsGap } from './skin-gap.ts';
 import { partShape, segmentShape } from './solids.ts';
 
 /** Gaps wider than this are in nobody's way. */
@@ -39,6 +39,8 @@ interface Body {
 interface Other {
   bounds: Bounds;
   solids: readonly Solid[];
+  /** Set where it is a neighbour. */
+  body?: Body;
 }
 
 /** A stretch of a body and a solid it may come near to. */
@@ -63,13 +65,17 @@ export function sitterDistances(bodies: readonly PlacedBody[], parts: readonly P
     const solids = of.pose.segments.map((segment) => ({ name: segment.name, shape: segmentShape(segment) }));
     return { of, solids, bounds: boundsAround(solids.map(({ shape }) => shape)) };
   });
-  const neighbours = made.map(({ of, solids, bounds }): Other => ({
-    bounds,
-    solids: solids.map(({ name, shape }): Solid => ({
-      shape,
-      thing: { kind: 'body', placeId: of.placeId, segment: name },
-    })),
-  }));
+  const neighbours = made.map((body): Other => {
+    const { of, solids, bounds } = body;
+    return {
+      bounds,
+      body,
+      solids: solids.map(({ name, shape }): Solid => ({
+        shape,
+        thing: { kind: 'body', placeId: of.placeId, segment: name },
+      })),
+    };
+  });
   const furniture = parts.map((part) => {
     const { id, pieceId, role } = part;
     const solid: Solid = { shape: partShape(part), thing: { kind: 'part', partId: id, pieceId, role } };
@@ -149,15 +155,24 @@ function smallestGap(body: Body, others: readonly Other[]): { gap: SitterGap; ot
   return best;
 }
 
-/** The same distance measured on the mesh, where there is one. */
+/** The same distance measured on the meshes, where there are any; of bodies that meet the solids say how deep. */
 function onSkin(body: Body, gap: SitterGap, other: Other): SitterGap {
   const { mesh } = body.of;
   const [only] = other.solids;
-  if (!mesh || only?.thing.kind !== 'part') return gap;
-  const measured = skinGap(mesh, only.shape, gap.distanceMm + SKIN_BEYOND_MM);
-  if (!measured) return gap;
+  if (!mesh || !only) return gap;
+  const limit = gap.distanceMm + SKIN_BEYOND_MM;
+  if (only.thing.kind === 'part') {
+    const measured = skinGap(mesh, only.shape, limit);
+    if (!measured) return gap;
+    const segment = stretchAt(body, measured.fromMm) ?? gap.segment;
+    return { ...measured, segment, thing: only.thing, measuredOn: 'skin' };
+  }
+  const theirs = other.body?.of.mesh;
+  const measured = theirs && skinsGap(mesh, theirs, limit);
+  if (!measured || !other.body || gap.thing.kind !== 'body') return gap;
   const segment = stretchAt(body, measured.fromMm) ?? gap.segment;
-  return { ...measured, segment, thing: only.thing, measuredOn: 'skin' };
+  const theirSegment = stretchAt(other.body, measured.toMm) ?? gap.thing.segment;
+  return { ...measured, segment, thing: { ...gap.thing, segment: theirSegment }, measuredOn: 'skin' };
 }
 
 /** The skin may be further off than the solids by this much. */

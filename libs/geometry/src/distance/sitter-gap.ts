@@ -9,7 +9,7 @@ export interface PlacedBody {
   /** The piece it sits on. */
   pieceId: string;
   pose: Pick<MannequinPose, 'segments'>;
-  /** The near mesh; where it is given, distances from parts are measured on it. */
+  /** The near mesh; where it is given, distances are measured on it. */
   mesh?: MannequinMesh;
 }
 
@@ -23,7 +23,7 @@ export interface SitterGap extends Gap {
   /** The place of the body, such as `left forearm`. */
   segment: string;
   thing: Thing;
-  /** Solids stand for the body within 3 mm, elbows and shoulders of raised arms within 10. */
+  /** Skin is right within 3 mm; solids, for how deep two bodies meet, within 10 at elbows and shoulders of raised arms. */
   measuredOn: 'skin' | 'solids';
 }
 

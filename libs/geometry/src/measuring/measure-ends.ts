@@ -1,6 +1,6 @@
 import { gapBetween, type Gap } from '../distance/gap.ts';
 import { hull, type Shape } from '../distance/shape.ts';
-import { skinGap } from '../distance/skin-gap.ts';
+import { skinGap, skinsGap } from '../distance/skin-gap.ts';
 import { partShape, segmentShape } from '../distance/solids.ts';
 import { partEdges } from '../drawing/solid-outline.ts';
 import { mixPoints } from '../mannequin/vector.ts';
@@ -60,7 +60,7 @@ function found(end: MeasureEnd, scene: MeasuringScene): Found | undefined {
 const turned = (gap: Gap | undefined): Gap | undefined =>
   gap && { ...gap, fromMm: gap.toMm, toMm: gap.fromMm };
 
-/** The smallest gap; of two bodies the second is taken as its simple solids, right within 3 mm. */
+/** The smallest gap; of two bodies that meet the second is taken as its simple solids. */
 function gapOf(one: Found, other: Found): Gap | undefined {
   if (one.kind === 'solid') {
     return other.kind === 'solid' ? gapBetween(one.shape, other.shape) : turned(gapOf(other, one));
@@ -71,8 +71,11 @@ function gapOf(one: Found, other: Found): Gap | undefined {
     const gap = skinGap(one.body.mesh, segmentShape(segment), best?.distanceMm);
     if (gap && (!best || gap.distanceMm < best.distanceMm)) best = gap;
   }
-  return best;
+  return (best && skinsGap(one.body.mesh, other.body.mesh, best.distanceMm + SOLIDS_WITHIN_MM)) ?? best;
 }
+
+/** The skin may be further off than the solids by this much. */
+const SOLIDS_WITHIN_MM = 20;
 
 /**
  * Measures between two ends: points as they are, whole parts and bodies by the shortest way between them.
