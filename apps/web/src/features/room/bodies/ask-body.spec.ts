@@ -1,4 +1,4 @@
-import { mannequinMesh, poseMannequin } from '@settlewright/geometry';
+import { mannequinMesh, poseMannequin, type SeatPoint } from '@settlewright/geometry';
 import { createBodyModel } from '@settlewright/anthropometry';
 import summary from '@settlewright/seed-data/populations/ansur2.json';
 import { afterEach, expect, it, vi } from 'vitest';
@@ -6,11 +6,11 @@ import { askBody, knownBody } from './ask-body.ts';
 import type { BodyQuestion } from './body.worker.ts';
 
 const model = createBodyModel(summary);
-const pose = () =>
+const pose = (shoeMm = 25, frame: SeatPoint = { hipMm: [0, 450, 135], facingRad: 0 }) =>
   poseMannequin({
     means: model.predict({ bodyData: 'women', measured: {}, shoeMm: 25, clothing: 'light' }).means(),
-    shoeMm: 25,
-    frame: { hipMm: [0, 450, 135], facingRad: 0 },
+    shoeMm,
+    frame,
     situation: { effectiveDepthMm: 430, seatTiltRad: 0, backLeanRad: 0.1, backTopMm: 900 },
     sinkMm: 10,
   });
@@ -38,7 +38,7 @@ it('makes one at a time in the worker, and none that nobody wants any more', asy
     }
   }
   vi.stubGlobal('Worker', SlowWorker);
-  const poses = [pose(), pose(), pose()] as const;
+  const poses = [pose(10), pose(15), pose(20)] as const;
   let wanted = true;
   const asked = [
     askBody(poses[0], 'far', () => true),
@@ -53,4 +53,17 @@ it('makes one at a time in the worker, and none that nobody wants any more', asy
   await vi.waitFor(() => expect(put).toHaveLength(2));
   answer();
   expect((await asked[2])?.positions.every(Number.isFinite)).toBe(true);
+});
+
+it('sets a skin down where the same body sits the same way, and makes another for another posture', async () => {
+  vi.stubGlobal('Worker', undefined);
+  await askBody(pose(), 'near', () => true);
+  const moved = pose(25, { hipMm: [1200, 450, -700], facingRad: 2.1 });
+  const [set, made] = [knownBody(moved, 'near')!, mannequinMesh(moved, 'near')];
+  for (const key of ['positions', 'normals'] as const) {
+    const off = made[key].map((x, n) => Math.abs(x - set[key][n]!));
+    expect(off.reduce((most, x) => Math.max(most, x))).toBeLessThan(1e-3);
+  }
+  expect(knownBody(moved, 'near')).toBe(set);
+  expect(knownBody(pose(25, { hipMm: [1200, 520, -700], facingRad: 2.1 }), 'near')).toBeUndefined();
 });

@@ -6,26 +6,22 @@ import {
 } from '@settlewright/geometry';
 import { createAsker } from '@/lib/ask-worker.ts';
 import type { BodyQuestion } from './body.worker.ts';
+import { createSkins } from './kept-skins.ts';
 
 const ask = createAsker(
   () => new Worker(new URL('./body.worker.ts', import.meta.url), { type: 'module', name: 'bodies' }),
   'The drawing of bodies stopped.',
 );
 
-const made = new WeakMap<MannequinPose, Partial<Record<MannequinDetail, MannequinMesh>>>();
+const skins = createSkins();
 
-/** A skin that was made before; it is forgotten with its pose. */
+/** A skin that was made before, here or where the same body sat the same way. */
 export const knownBody = (pose: MannequinPose, detail: MannequinDetail): MannequinMesh | undefined =>
-  made.get(pose)?.[detail];
-
-function keep(pose: MannequinPose, detail: MannequinDetail, mesh: MannequinMesh): MannequinMesh {
-  made.set(pose, { ...made.get(pose), [detail]: mesh });
-  return mesh;
-}
+  skins.known(pose, detail);
 
 /** The skin of a pose at once, made on the page where it was not made before. */
 export const bodyNow = (pose: MannequinPose, detail: MannequinDetail): MannequinMesh =>
-  knownBody(pose, detail) ?? keep(pose, detail, mannequinMesh(pose, detail));
+  knownBody(pose, detail) ?? skins.keep(pose, detail, mannequinMesh(pose, detail));
 
 let last: Promise<unknown> = Promise.resolve();
 
@@ -49,7 +45,7 @@ export function askBody(
       pose: { means, stance, placement },
       detail,
     }));
-    return keep(pose, detail, mesh);
+    return skins.keep(pose, detail, mesh);
   });
   last = answer.catch(() => undefined);
   return answer;
