@@ -70,7 +70,7 @@ function sentence(table: PieceOf<'table'>): SpecSentence {
 
 type Run = Parameters<typeof sentenceOf>[number];
 
-/** " Left leaf 10″ wide, up; right leaf 10″ wide, hanging; making 4′ 10″ in all." */
+/** " Left leaf 10″ wide, up; right leaf 10″ wide, hanging; making 4′ 10″ long in all as they are." */
 function leafRuns(table: PieceOf<'table'>): Run[] {
   const leaves = leavesOfTable(table);
   if (leaves.length === 0) return [];
@@ -89,7 +89,7 @@ function leafRuns(table: PieceOf<'table'>): Run[] {
     ' ',
     {
       kind: 'derived',
-      key: 'leaves',
+      key: atEnds ? 'wholeLengthMm' : 'wholeWidthMm',
       text: `making ${atEnds ? 'long' : 'wide'} in all as they are`,
       valueMm: atEnds ? x1 - x0 : z1 - z0,
     },

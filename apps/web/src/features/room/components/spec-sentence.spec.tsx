@@ -69,6 +69,17 @@ describe('a number of the spec sentence', () => {
     expect(seat()).toHaveAccessibleName('Seat height, eighteen inches, edit');
   });
 
+  it('says how long a table is with its leaves in feet and inches', () => {
+    const table = addPiece(emptySetDocument(), 'table').document.pieces[0];
+    if (table?.kind !== 'table') throw new Error('a table was added');
+    const end = { widthMm: 254, down: false };
+    const longer = { ...table, id: added.pieceId, lengthMm: 1000, leaves: { left: end, right: end } };
+    open(true, { ...emptySetDocument(), pieces: [longer] });
+    expect(screen.getByRole('group', { name: /in words$/ })).toHaveTextContent(
+      /4′ 11⅜″ long in all as they are\.$/,
+    );
+  });
+
   it('takes what is typed on Enter, as one named step, and says the verdicts that changed', async () => {
     const user = open();
     act(() => seat().focus());

@@ -7,6 +7,7 @@ import {
 } from '@settlewright/geometry';
 import { Fragment, useId, useRef, useState } from 'react';
 import { Measure } from '@/components/measure.tsx';
+import { styleFor } from '../numbers.ts';
 import { useSurroundings } from '../room-context.tsx';
 import { NumberFlag, type NumberAtHand } from './number-flag.tsx';
 import { NumberSlip } from './number-slip.tsx';
@@ -54,7 +55,7 @@ function DerivedWords({
   const [verb, ...rest] = token.text.split(' ');
   return (
     <>
-      {verb} <Measure text={formatLength(token.valueMm, style)} /> {rest.join(' ')}
+      {verb} <Measure text={formatLength(token.valueMm, styleFor(token, style))} /> {rest.join(' ')}
     </>
   );
 }
