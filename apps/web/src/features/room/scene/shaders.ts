@@ -54,6 +54,11 @@ const FLAT_FRAGMENT = /* glsl */ `
   ${CUT}
   void main() { cut(); gl_FragColor = vec4(uShade, 0.55); }`;
 
+/** A face is set back by as much as it slopes over half the width of a line, which else would sink into it on one side. */
+const LINE_HALF_PX = 0.6;
+/** Lines lie so far before the faces they edge, and behind anything that stands further before them, m. */
+const LINE_NEARER_M = 0.0025;
+
 const LINE_VERTEX = /* glsl */ `
   attribute vec3 lineStart;
   attribute vec3 lineEnd;
@@ -73,7 +78,9 @@ const LINE_VERTEX = /* glsl */ `
     vec4 at = position.y < 0.5 ? a : b;
     vec2 offset = across * position.x + along * (position.y * 2.0 - 1.0) * 0.8;
     at.xy += offset * width / uSize * at.w;
-    at.z -= 0.00035 * at.w;
+    vec4 seen = modelViewMatrix * vec4(position.y < 0.5 ? lineStart : lineEnd, 1.0);
+    vec4 nearer = projectionMatrix * (seen + vec4(0.0, 0.0, ${LINE_NEARER_M}, 0.0));
+    at.z = nearer.z / nearer.w * at.w;
     vRoom = roomOf(mix(lineStart, lineEnd, position.y));
     vWeight = lineWeight;
     gl_Position = at;
@@ -174,14 +181,14 @@ export function createMaterials(shared: SharedUniforms) {
       ...solid,
       side: DoubleSide,
       polygonOffset: true,
-      polygonOffsetFactor: 1,
+      polygonOffsetFactor: LINE_HALF_PX,
       polygonOffsetUnits: 1,
     }),
     chosenSurface: new ShaderMaterial({
       ...solid,
       side: DoubleSide,
       polygonOffset: true,
-      polygonOffsetFactor: 1,
+      polygonOffsetFactor: LINE_HALF_PX,
       polygonOffsetUnits: 1,
       stencilWrite: true,
       stencilRef: CHOSEN_STENCIL,
