@@ -14,6 +14,7 @@ export * from './checks/rule-book.ts';
 export * from './checks/confidence.ts';
 export * from './checks/rule-conflicts.ts';
 export * from './checks/seat-sink.ts';
+export { sinkBand, type SinkBand } from './checks/sink-band.ts';
 export type { CheckInput } from './checks/check-input.ts';
 export { checkSet, checkSitter } from './checks/check-set.ts';
 export { standInPlaces, unlikePlaces } from './checks/unlike-places.ts';

@@ -12,6 +12,7 @@ import {
 import { useState } from 'react';
 import { Button } from '@/components/button.tsx';
 import { Menu } from '@/components/menu.tsx';
+import { CushionsButton } from '../cushions-make/cushions-button.tsx';
 import type { PieceActions } from '../hooks/use-piece-actions.ts';
 import { useSurroundings } from '../room-context.tsx';
 import { sitterName } from '../sitters.ts';
@@ -58,6 +59,7 @@ export function PieceDetails({ piece, document, actions, onChoose, onCopy }: Pro
         <Button look="word" className="text-xs!" onClick={() => setOpen('numbers')}>
           All numbers
         </Button>
+        <CushionsButton piece={piece} actions={actions} />
         {canEdit && (
           <Menu
             name={`More of ${piece.mark}, menu`}

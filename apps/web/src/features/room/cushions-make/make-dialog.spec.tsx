@@ -1,0 +1,145 @@
+import { createBodyModel, loadRuleBook } from '@settlewright/anthropometry';
+import { ARRANGEMENTS, type SetDocument } from '@settlewright/geometry';
+import rules from '@settlewright/seed-data/fit-rules.json';
+import summary from '@settlewright/seed-data/populations/ansur2.json';
+import { screen, within } from '@testing-library/react';
+import userEvent from '@testing-library/user-event';
+import { http, HttpResponse } from 'msw';
+import { describe, expect, it } from 'vitest';
+import { renderPage, signInAs, WORKSHOP_ID } from '@/test/render-page.tsx';
+import { server } from '@/test/server.ts';
+import { usePieceActions } from '../hooks/use-piece-actions.ts';
+import { createPictureMaker } from '../picture.ts';
+import { RoomContext, type RoomSurroundings } from '../room-context.tsx';
+import { createRoomStore, RoomStoreContext, undoNames, useRoom, type RoomStore } from '../store.ts';
+import { CushionsButton } from './cushions-button.tsx';
+import { foamEffect, withFoam } from './foam-effect.ts';
+// The button fetches it when it is pressed: here it is there already.
+import './make-dialog.tsx';
+
+const engine = { model: createBodyModel(summary), ruleBook: loadRuleBook(rules) };
+const maker = createPictureMaker(engine, []);
+const start = ARRANGEMENTS.find(({ id }) => id === 'facing-benches')!.build();
+const seated: SetDocument = {
+  ...start,
+  seating: [5, 95].map((percentile, i) => ({
+    pieceId: 'b1',
+    place: i + 1,
+    sitter: { kind: 'mannequin', bodyData: i === 0 ? 'women' : 'men', measure: 'stature', percentile },
+  })),
+};
+
+function Row() {
+  const piece = useRoom((state) => state.document.pieces.find(({ id }) => id === 'b1')!);
+  const actions = usePieceActions(() => {});
+  return <CushionsButton piece={piece} actions={actions} />;
+}
+
+async function open(canEdit = true): Promise<RoomStore> {
+  signInAs('designer');
+  const kept = { number: 0, settings: { allowancesMm: {}, foams: [] }, changedAt: null, changedByName: null };
+  server.use(http.get('*/api/workshops/:id/cushion-settings', () => HttpResponse.json(kept)));
+  const store = createRoomStore(seated);
+  const surroundings: RoomSurroundings = {
+    path: { workshopId: WORKSHOP_ID, productionId: 'p', setId: 's' },
+    setName: 'Dining car',
+    canEdit,
+    detail: 'full',
+    style: { system: 'feet-inches', roundTo: 8 },
+    cast: [],
+    engine,
+    maker,
+  };
+  renderPage(
+    <RoomContext value={surroundings}>
+      <RoomStoreContext value={store}>
+        <Row />
+      </RoomStoreContext>
+    </RoomContext>,
+  );
+  await userEvent.click(screen.getByRole('button', { name: 'Cushions' }));
+  await screen.findByRole('dialog', { name: 'Cushions of B1' });
+  return store;
+}
+
+async function pick(label: RegExp, option: string | RegExp) {
+  await userEvent.click(screen.getByRole('button', { name: label }));
+  await userEvent.click(await screen.findByRole('option', { name: option }));
+}
+
+describe('what is chosen of a cushion', () => {
+  it('is one undoable step by name, drawn at once', async () => {
+    const store = await open();
+    await pick(/^Construction,/, 'knife edge');
+    expect(store.getState().document.cushions?.['b1/seat-1']?.make?.construction).toBe('knife-edge');
+    expect(undoNames(store).undo).toBe('C1 made knife edge, zip at the back edge, welt cut straight');
+    store.temporal.getState().undo();
+    expect(store.getState().document.cushions).toBeUndefined();
+    expect(screen.getByRole('img', { name: /^Plan of C1/ })).toBeVisible();
+  });
+
+  it('says in words what cannot be made', async () => {
+    await open();
+    await pick(/^Construction,/, 'bullnose front');
+    await pick(/^Closed at the edge,/, 'front');
+    expect(await screen.findByRole('alert')).toHaveTextContent(
+      'It cannot be made so: a bullnose front closes at the back edge.',
+    );
+  });
+
+  it('takes a taper when the field is left, and cuts a notch', async () => {
+    const store = await open();
+    await userEvent.click(screen.getByRole('button', { name: 'Shape' }));
+    const field = screen.getByLabelText('Front in at the sitter’s left');
+    await userEvent.clear(field);
+    await userEvent.type(field, '2');
+    await userEvent.tab();
+    await userEvent.click(screen.getByRole('button', { name: 'Cut a notch' }));
+    const { shape } = store.getState().document.cushions!['b1/seat-1']!;
+    expect(shape?.frontInMm?.left).toBeCloseTo(50.8, 6);
+    expect(shape?.notches).toHaveLength(1);
+  });
+
+  it('changes nothing for those who only read', async () => {
+    await open(false);
+    expect(screen.getByRole('button', { name: /^Construction,/ })).toBeDisabled();
+    expect(screen.queryByRole('button', { name: 'Shape' })).toBeNull();
+  });
+});
+
+describe('another foam', () => {
+  it('is told before it is taken, with the lightest and the heaviest who sit', async () => {
+    const store = await open();
+    await userEvent.click(screen.getByRole('button', { name: /^Foam, and what another/ }));
+    const seats = screen.getAllByText(/seat .* off the floor at the front/);
+    expect(seats).toHaveLength(2);
+    await pick(/^Try another foam,/, /^quick-dry outdoors/);
+    expect(screen.getByRole('table', { name: 'Verdicts before and after' })).toBeVisible();
+    expect(store.getState().document).toBe(seated);
+    await userEvent.click(screen.getByRole('button', { name: 'Take it' }));
+    const bench = store.getState().document.pieces.find(({ id }) => id === 'b1');
+    expect(bench?.kind === 'bench' && bench.seatCushion.foam.grade).toBe('quick-dry outdoors');
+    expect(within(screen.getByRole('dialog')).queryByRole('table')).toBeNull();
+  });
+
+  it('that is softer lets everybody down, the heaviest most, within its band', () => {
+    const piece = seated.pieces.find((one) => one.id === 'b1')!;
+    if (piece.kind !== 'bench') throw new Error('no bench');
+    const soft = { ...piece.seatCushion.foam, grade: 'soft', ifd25N: 120 };
+    const changed = withFoam(piece, 'seat', soft, piece.seatCushion.thicknessMm);
+    const after = { ...seated, pieces: seated.pieces.map((one) => (one.id === 'b1' ? changed : one)) };
+    const bodies = maker.picture(seated).bodies;
+    const was = foamEffect({ before: seated, after: seated, piece }, maker.check, bodies, engine.ruleBook);
+    const is = foamEffect({ before: seated, after, piece: changed }, maker.check, bodies, engine.ruleBook);
+    expect(was.changes).toEqual([]);
+    expect(is.before).toEqual(was.before);
+    for (const who of ['lightest', 'heaviest'] as const) {
+      const { low, best, high } = is[who].heightMm;
+      expect(low).toBeLessThanOrEqual(best);
+      expect(best).toBeLessThanOrEqual(high);
+      expect(best).toBeLessThan(was[who].heightMm.best);
+    }
+    expect(is.heaviest.heightMm.best).toBeLessThan(is.lightest.heightMm.best);
+    expect(changed.deckHeightMm).toBe(piece.deckHeightMm);
+  });
+});
