@@ -1,4 +1,5 @@
-// The product's processes on this machine: PostgreSQL, the mail stand-in, the API and a worker.
+// The product's processes on this machine: PostgreSQL, the stand-ins for mail, payments and files, the API and a worker.
+import { randomBytes } from 'node:crypto';
 import http from 'node:http';
 import path from 'node:path';
 import { freePort } from './ports.mjs';
@@ -17,10 +18,52 @@ export async function startMail() {
   return { smtpUrl: `smtp://127.0.0.1:${smtpPort}`, page: `http://127.0.0.1:${pagePort}/` };
 }
 
+const fake = (name, env) =>
+  launch([process.execPath, path.join(root, 'scripts/fakes', name)], { env: { ...process.env, ...env } });
+
+/** Starts the payment stand-in and answers what the API needs of it; with STRIPE_SECRET_KEY set nothing is started. */
+async function startPayments(apiPort) {
+  if (process.env.STRIPE_SECRET_KEY) return {};
+  const port = await freePort(8026);
+  const webhookSecret = randomBytes(24).toString('hex');
+  fake('payments.mjs', {
+    FAKE_PAYMENTS_PORT: String(port),
+    FAKE_PAYMENTS_EVENTS_URL: `http://127.0.0.1:${apiPort}/api/payments/events`,
+    FAKE_PAYMENTS_WEBHOOK_SECRET: webhookSecret,
+  });
+  return {
+    STRIPE_SECRET_KEY: 'sk_test_this_machine',
+    STRIPE_WEBHOOK_SECRET: webhookSecret,
+    STRIPE_API_URL: `http://127.0.0.1:${port}`,
+  };
+}
+
+/** Starts the object store stand-in on a folder beside the database; with S3_BUCKET set nothing is started. */
+async function startObjects(cluster) {
+  if (process.env.S3_BUCKET) return {};
+  const port = await freePort(8027);
+  fake('objects.mjs', {
+    FAKE_OBJECTS_PORT: String(port),
+    FAKE_OBJECTS_FOLDER: path.join(root, '.data', `objects-${cluster}`),
+  });
+  return {
+    S3_BUCKET: 'settlewright',
+    S3_ENDPOINT: `http://127.0.0.1:${port}`,
+    S3_ACCESS_KEY_ID: 'this-machine',
+    S3_SECRET_ACCESS_KEY: 'this-machine',
+  };
+}
+
+/** The stand-ins for payments and files, as the API is told of them. */
+export async function startStandIns(cluster, apiPort) {
+  return { ...(await startPayments(apiPort)), ...(await startObjects(cluster)) };
+}
+
 /** What the API needs to know of its surroundings. */
-export function apiEnvironment({ databaseUrl, smtpUrl, port, publicUrl, demo }) {
+export function apiEnvironment({ databaseUrl, smtpUrl, port, publicUrl, demo, standIns }) {
   return {
     ...process.env,
+    ...standIns,
     NODE_ENV: process.env.NODE_ENV ?? 'development',
     DATABASE_URL: databaseUrl,
     SMTP_URL: smtpUrl,
@@ -59,12 +102,13 @@ export const workerCommand = [
   path.join(root, 'apps/api/dist/worker.js'),
 ];
 
-/** PostgreSQL, mail stand-in, the built API and a worker; `port` 0 takes any free one. */
+/** PostgreSQL, stand-ins, the built API and a worker; `port` 0 takes any free one. */
 export async function startProduct({ cluster, port, demo, env = {} }) {
   const database = await startPostgres(cluster);
   const mail = await startMail();
   const taken = await freePort(port);
   const address = `http://127.0.0.1:${taken}`;
+  const standIns = await startStandIns(cluster, taken);
   const api = launch([process.execPath, '--enable-source-maps', path.join(root, 'apps/api/dist/main.js')], {
     env: {
       ...apiEnvironment({
@@ -73,6 +117,7 @@ export async function startProduct({ cluster, port, demo, env = {} }) {
         port: taken,
         publicUrl: address,
         demo,
+        standIns,
       }),
       ...env,
     },

@@ -6,21 +6,27 @@ import { EXPECTED_ACCESS } from './access/expected-access';
 import { fillPath, listRoutes, type Route } from './access/routes';
 import { as, createPerson, type Person } from './factories/people';
 import { createShop, type Shop } from './factories/shop';
+import { startObjects, type StandIn, STORE_KEYS } from './factories/stand-ins';
 import { startTestApp, type TestApp } from './test-app';
 
-jest.setTimeout(180_000);
+jest.setTimeout(300_000);
 
 let test: TestApp;
 let routes: Route[];
 let shop: Shop;
 let elsewhere: Shop;
+let store: StandIn;
 beforeAll(async () => {
-  test = await startTestApp();
+  store = await startObjects();
+  test = await startTestApp({ objectStore: { ...STORE_KEYS, endpoint: store.url } });
   routes = listRoutes(test);
   shop = await createShop(test, 'Ours');
   elsewhere = await createShop(test, 'Theirs');
 });
-afterAll(() => test.close());
+afterAll(async () => {
+  await test.close();
+  await store.end();
+});
 
 const expectedOf = (route: Route): readonly string[] => EXPECTED_ACCESS[route.name] ?? [];
 const hasRoles = (route: Route) => ROLES.some((role) => expectedOf(route).includes(role));
@@ -34,6 +40,9 @@ function ask(
   from = shop,
 ): Promise<Response> {
   const sent = as(test, who)[route.method](fillPath(route.path, parameters));
+  if (route.method === 'post' && route.path.endsWith('/files')) {
+    return sent.attach('file', Buffer.from('%PDF-1.4'), 'paper.pdf').then((answer) => answer);
+  }
   const body = bodiesFor(from)[route.name];
   return body ? sent.send(body).then((answer) => answer) : sent.then((answer) => answer);
 }

@@ -12,17 +12,20 @@ import { EXPECTED_ACCESS } from './access/expected-access';
 import { fillPath, listRoutes, type Route } from './access/routes';
 import { as } from './factories/people';
 import { createShop, PRIVATE, type Shop } from './factories/shop';
+import { startObjects, type StandIn, STORE_KEYS } from './factories/stand-ins';
 import { startTestApp, type TestApp } from './test-app';
 
 jest.setTimeout(60_000);
 
 let test: TestApp;
+let store: StandIn;
 let shop: Shop;
 let other: Shop;
 let folder: string;
 beforeAll(async () => {
   folder = await mkdtemp(join(tmpdir(), 'private-data-'));
-  test = await startTestApp();
+  store = await startObjects();
+  test = await startTestApp({ objectStore: { ...STORE_KEYS, endpoint: store.url } });
   shop = await createShop(test, 'Ours');
   other = await createShop(test, 'Theirs');
 });
@@ -43,6 +46,7 @@ async function pdfText(content: Buffer): Promise<string> {
 
 /** What a person could read in an answer, also when it is a paper. */
 async function readable(answer: Response): Promise<string> {
+  if (answer.type === 'image/jpeg') return (answer.body as Buffer).toString('latin1');
   return answer.type === 'application/pdf' ? pdfText(answer.body as Buffer) : answer.text;
 }
 
@@ -125,7 +129,7 @@ describe('the holder of a private link', () => {
 
   it('reads one order, without a word about the people who will sit there', async () => {
     for (const path of LINK.get) {
-      const answer = await get(path.replace('{token}', shop.linkToken), null);
+      const answer = await get(fillPath(path, { ...shop.parameters, token: shop.linkToken }), null);
       expect([path, answer.status]).toEqual([path, 200]);
       const text = await readable(answer);
       const people = Object.values(shop.people).map((person) => person.email);
@@ -178,10 +182,12 @@ describe('the holder of a private link', () => {
   ])('is refused everywhere when the link is %s', async (_what, makeToken) => {
     const token = await makeToken();
     for (const path of LINK.get) {
-      expect([404, 410]).toContain((await get(path.replace('{token}', token), null)).status);
+      expect([404, 410]).toContain((await get(fillPath(path, { ...shop.parameters, token }), null)).status);
     }
     for (const [path, body] of LINK.post) {
-      const answer = await as(test, null).post(path.replace('{token}', token)).send(body);
+      const answer = await as(test, null)
+        .post(fillPath(path, { ...shop.parameters, token }))
+        .send(body);
       expect([404, 410]).toContain(answer.status);
     }
   });
@@ -198,6 +204,13 @@ function listOfLinkRoutes(): { get: string[]; post: [string, object][] } {
   const bodies: Record<string, object> = {
     '/link/{token}/acknowledge': { name: 'Uma Upholsterer' },
     '/link/{token}/reply': { text: 'In three weeks' },
+    '/link/{token}/quote': {
+      ...{ name: 'Uma', sentAt: '2026-01-01T00:00:00Z', currency: 'USD', validUntil: '2099-01-01' },
+      lines: [{ text: 'Cushions', quantity: 1, unitMinor: 100 }],
+    },
+    '/link/{token}/state': { name: 'Uma', to: 'shipped' },
+    '/link/{token}/questions': { text: 'Which day?' },
+    '/link/{token}/questions/{questionId}/answer': { answer: 'On Friday' },
   };
   const names = Object.keys(EXPECTED_ACCESS).filter((route) => route.includes('/link/{token}'));
   return {

@@ -1,3 +1,4 @@
+import type { IncomingMessage } from 'node:http';
 import compression from 'compression';
 import cookieParser from 'cookie-parser';
 import type { NestExpressApplication } from '@nestjs/platform-express';
@@ -40,6 +41,8 @@ export function setUpHttp(app: NestExpressApplication, config: Settings): void {
     cookieParser(),
     refuseOtherSites(config.publicUrl),
   );
+  // A signature is over the very bytes that came.
+  app.useBodyParser('raw', { limit: BODY_LIMIT.bytes, type: isSigned });
   app.useBodyParser('json', { limit: BODY_LIMIT.bytes });
   app.use(nameBodyFaults);
   if (config.webDist) serveWebApp(app, config.webDist);
@@ -47,4 +50,8 @@ export function setUpHttp(app: NestExpressApplication, config: Settings): void {
   app.useGlobalPipes(createValidationPipe());
   app.useGlobalFilters(new ProblemFilter());
   app.enableShutdownHooks();
+}
+
+function isSigned({ url = '' }: IncomingMessage): boolean {
+  return url.split('?', 1)[0] === `/${API_PREFIX}/payments/events`;
 }

@@ -65,6 +65,23 @@ describe('settings', () => {
     expect(faults).not.toMatch(/hunter2|pw@h/);
   });
 
+  it('take what belongs together whole or not at all', () => {
+    expect(readSettings({ DATABASE_URL })).toMatchObject({ payments: null, objectStore: null });
+    expect(faultsOf({ DATABASE_URL, STRIPE_SECRET_KEY: 'sk_test_1234', S3_BUCKET: 'orders' })).toEqual([
+      'STRIPE_WEBHOOK_SECRET is missing',
+      'S3_ACCESS_KEY_ID is missing',
+      'S3_SECRET_ACCESS_KEY is missing',
+    ]);
+    const whole = {
+      ...{ STRIPE_SECRET_KEY: 'sk_test_1234', STRIPE_WEBHOOK_SECRET: 'whsec_1234' },
+      ...{ S3_BUCKET: 'orders', S3_ACCESS_KEY_ID: 'id', S3_SECRET_ACCESS_KEY: 'key' },
+    };
+    expect(readSettings({ DATABASE_URL, ...whole })).toMatchObject({
+      payments: { secretKey: 'sk_test_1234', apiUrl: 'https://api.stripe.com' },
+      objectStore: { bucket: 'orders', endpoint: null, region: 'us-east-1' },
+    });
+  });
+
   it.each([
     ['false', false],
     ['2', 2],

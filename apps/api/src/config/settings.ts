@@ -43,6 +43,14 @@ const shared = {
     .min(1, 'accepted: whole seconds from 1 to 3600')
     .max(3600, 'accepted: whole seconds from 1 to 3600')
     .default(60),
+  STRIPE_SECRET_KEY: z.string().min(8, 'accepted: at least 8 characters').optional(),
+  STRIPE_WEBHOOK_SECRET: z.string().min(8, 'accepted: at least 8 characters').optional(),
+  STRIPE_API_URL: address('https://', 'http://').default('https://api.stripe.com'),
+  S3_BUCKET: z.string().min(3, 'accepted: the name of a bucket').optional(),
+  S3_ENDPOINT: address('https://', 'http://').optional(),
+  S3_REGION: z.string().min(1).default('us-east-1'),
+  S3_ACCESS_KEY_ID: z.string().min(1).optional(),
+  S3_SECRET_ACCESS_KEY: z.string().min(1).optional(),
   LOG_LEVEL: z.enum(['trace', 'debug', 'info', 'warn', 'error', 'fatal', 'silent']).default('info'),
 };
 
@@ -64,7 +72,31 @@ const development = z.object({
   MAIL_FROM: z.string().min(3).default('Settlewright <no-reply@localhost>'),
 });
 
-const SECRET_NAMES = new Set(['JWT_SECRET', 'DATABASE_URL', 'SMTP_URL']);
+const SECRET_NAMES = new Set([
+  'JWT_SECRET',
+  'DATABASE_URL',
+  'SMTP_URL',
+  'STRIPE_SECRET_KEY',
+  'STRIPE_WEBHOOK_SECRET',
+  'S3_ACCESS_KEY_ID',
+  'S3_SECRET_ACCESS_KEY',
+]);
+
+/** Where deposits are paid; the secrets are of the platform whose connected accounts the upholsterers have. */
+export interface PaymentSettings {
+  secretKey: string;
+  webhookSecret: string;
+  apiUrl: string;
+}
+
+/** Where files of orders are kept. Without an endpoint it is the region's own. */
+export interface ObjectStoreSettings {
+  bucket: string;
+  endpoint: string | null;
+  region: string;
+  accessKeyId: string;
+  secretAccessKey: string;
+}
 
 export interface Settings {
   production: boolean;
@@ -86,6 +118,10 @@ export interface Settings {
   searchPartMs: number;
   /** For so long a block is a worker's; then its worker is taken for lost and another gets it. */
   blockTimeoutSeconds: number;
+  /** null: deposits are only recorded by hand */
+  payments: PaymentSettings | null;
+  /** null: no files are taken */
+  objectStore: ObjectStoreSettings | null;
   cookieSecure: boolean;
   logLevel: string;
   demo: boolean;
@@ -103,6 +139,11 @@ export function readSettings(env: NodeJS.ProcessEnv, role: 'server' | 'worker' =
     throw new SettingsError(read.error.issues.map((issue) => describeFault(issue, env)));
   }
   const values = read.data;
+  const faults = [
+    ...missingBeside(given, ['STRIPE_SECRET_KEY', 'STRIPE_WEBHOOK_SECRET']),
+    ...missingBeside(given, ['S3_BUCKET', 'S3_ACCESS_KEY_ID', 'S3_SECRET_ACCESS_KEY']),
+  ];
+  if (faults.length > 0) throw new SettingsError(faults);
   const publicUrl = (values.PUBLIC_URL ?? `http://localhost:${values.PORT}`).replace(/\/+$/, '');
   return {
     production: isProduction,
@@ -119,11 +160,35 @@ export function readSettings(env: NodeJS.ProcessEnv, role: 'server' | 'worker' =
     studyAtOnceMs: 500,
     searchPartMs: 1000,
     blockTimeoutSeconds: values.STUDY_BLOCK_TIMEOUT_SECONDS,
+    payments: paymentSettings(values),
+    objectStore: objectStoreSettings(values),
     cookieSecure: values.COOKIE_SECURE ?? publicUrl.startsWith('https://'),
     logLevel: values.LOG_LEVEL,
     demo: values.DEMO,
     webDist: values.WEB_DIST ? resolve(values.WEB_DIST) : null,
   };
+}
+
+type Values = z.infer<typeof development> | z.infer<typeof production>;
+
+function paymentSettings(values: Values): PaymentSettings | null {
+  const { STRIPE_SECRET_KEY: secretKey, STRIPE_WEBHOOK_SECRET: webhookSecret } = values;
+  if (secretKey === undefined || webhookSecret === undefined) return null;
+  return { secretKey, webhookSecret, apiUrl: values.STRIPE_API_URL };
+}
+
+function objectStoreSettings(values: Values): ObjectStoreSettings | null {
+  const { S3_BUCKET: bucket, S3_ACCESS_KEY_ID: accessKeyId, S3_SECRET_ACCESS_KEY: secretAccessKey } = values;
+  if (bucket === undefined || accessKeyId === undefined || secretAccessKey === undefined) return null;
+  const { S3_REGION: region, S3_ENDPOINT: endpoint = null } = values;
+  return { bucket, endpoint, region, accessKeyId, secretAccessKey };
+}
+
+/** Settings that only make sense together: what is missing once one is there. */
+function missingBeside(given: Record<string, string | undefined>, names: readonly string[]): string[] {
+  const missing = names.filter((name) => given[name] === undefined);
+  if (missing.length === names.length) return [];
+  return missing.map((name) => `${name} is missing`);
 }
 
 function describeFault(issue: { path: PropertyKey[]; message: string }, env: NodeJS.ProcessEnv): string {

@@ -1,11 +1,20 @@
 import { Module } from '@nestjs/common';
 import { TypeOrmModule } from '@nestjs/typeorm';
+import { ObjectStoreModule } from '../object-store/object-store.module';
+import { PaymentsModule } from '../payments/payments.module';
 import { ProductionsModule } from '../productions/productions.module';
 import { SetsModule } from '../sets/sets.module';
 import { UpholsterersModule } from '../upholsterers/upholsterers.module';
 import { UsersModule } from '../users/users.module';
 import { WorkshopsModule } from '../workshops/workshops.module';
+import { DepositsController } from './deposits/deposits.controller';
+import { DepositsService } from './deposits/deposits.service';
+import { PaymentNewsController } from './deposits/payment-news.controller';
+import { PaymentNews } from './deposits/payment-news.service';
 import { CushionOrder } from './entities/cushion-order.entity';
+import { FilesController } from './files/files.controller';
+import { OrderFiles } from './files/files.service';
+import { LinkFilesController } from './files/link-files.controller';
 import { HeldPapers } from './held-papers.service';
 import { InspectionsService } from './inspections/inspections.service';
 import { IssuedSets } from './issued-sets.service';
@@ -32,13 +41,24 @@ import { SentCushions } from './sent-cushions.service';
 @Module({
   imports: [
     TypeOrmModule.forFeature([CushionOrder]),
+    ObjectStoreModule,
+    PaymentsModule,
     ProductionsModule,
     SetsModule,
     UpholsterersModule,
     UsersModule,
     WorkshopsModule,
   ],
-  controllers: [OrdersController, OrderLifeController, LinkController, LinkLifeController],
+  controllers: [
+    OrdersController,
+    OrderLifeController,
+    DepositsController,
+    PaymentNewsController,
+    FilesController,
+    LinkController,
+    LinkLifeController,
+    LinkFilesController,
+  ],
   providers: [
     IssuedSets,
     OrdersService,
@@ -58,6 +78,9 @@ import { SentCushions } from './sent-cushions.service';
     QuotesService,
     QuestionsService,
     InspectionsService,
+    DepositsService,
+    PaymentNews,
+    OrderFiles,
   ],
   exports: [OrdersService, OrderCorrespondence, LinkService, OrderTexts, HeldPapers],
 })

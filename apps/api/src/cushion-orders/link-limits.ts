@@ -21,4 +21,11 @@ export class LinkLimits {
     const { order } = await this.links.open(token);
     await this.limits.take('link-answer', order.id);
   }
+
+  /** A file. */
+  async bringing(token: string, request: Request): Promise<void> {
+    await this.reading(request);
+    const { order } = await this.links.open(token);
+    await this.limits.take('link-file', order.id);
+  }
 }

@@ -152,18 +152,47 @@ export class OrderCorrespondence {
     });
   }
 
-  /** A mail that failed, or that nobody knows to have gone out, is sent once more because a person says so. */
-  async sendMailAgain(member: MemberInfo, place: OrderPlace): Promise<CushionOrder> {
+  /**
+   * A mail that failed, or that nobody knows to have gone out, is sent once more because a person says so; without an id, the
+   * last one.
+   */
+  async sendMailAgain(member: MemberInfo, place: OrderPlace, mailId?: string): Promise<CushionOrder> {
     await this.users.requireConfirmedEmail(member.userId);
     return this.dataSource.transaction(async (manager) => {
       const order = await lockOrder(manager, place);
-      const last = await this.mail.latestAbout(manager, order.id, OUTGOING_KINDS);
-      if (!last || !(await this.mail.sendAgain(manager, last.id))) {
-        throw Problem.conflict('mail-not-stuck', 'The last mail about this order needs no second sending.');
+      const mail = await this.mailAbout(manager, order, mailId);
+      if (!mail && mailId !== undefined) throw Problem.notFound('mail');
+      if (!mail || !(await this.mail.sendAgain(manager, mail.id))) {
+        throw Problem.conflict('mail-not-stuck', 'This mail about the order needs no second sending.');
       }
       await this.record(manager, member, 'cushion-order.mail-sent-again', order.id);
       return findOrder(manager, place);
     });
+  }
+
+  /** Somebody saw a mail come back. */
+  async mailBounced(member: MemberInfo, place: OrderPlace, mailId: string, note: string): Promise<void> {
+    const author = await this.users.get(member.userId);
+    await this.dataSource.transaction(async (manager) => {
+      const order = await lockOrder(manager, place);
+      const mail = await this.mailAbout(manager, order, mailId);
+      if (!mail) throw Problem.notFound('mail');
+      if (!(await this.mail.bounced(manager, mail.id, note))) {
+        throw Problem.conflict('mail-not-out', 'This mail has not gone out, so it cannot have come back.');
+      }
+      await recordEvent(manager, order, {
+        kind: 'mail-bounced',
+        byId: author.id,
+        byName: author.name,
+        note,
+      });
+      await this.record(manager, member, 'cushion-order.mail-bounced', order.id);
+    });
+  }
+
+  private async mailAbout(manager: EntityManager, order: CushionOrder, mailId?: string) {
+    const mails = await this.mail.allAbout(manager, order.id, OUTGOING_KINDS);
+    return mailId === undefined ? mails[0] : mails.find(({ id }) => id === mailId);
   }
 
   /** The earlier upholsterer must not work on for nobody. */

@@ -5,6 +5,7 @@ import { MailService } from '../mail/mail.service';
 import { CushionOrder } from './entities/cushion-order.entity';
 import { OrderEvent } from './entities/order-event.entity';
 import { OrderMessage } from './entities/order-message.entity';
+import { lifeTexts } from './life/life-texts';
 import { type OrderContent, type OrderSpec, SPEC_KEYS } from './order-content';
 
 type Change = (text: string) => string;
@@ -32,23 +33,31 @@ export class OrderTexts {
           rewrite: (change) => manager.update(OrderMessage, { id }, { text: change(text) }),
         };
       }
+      yield* lifeTexts(manager, order.id, where);
       yield* await this.mail.textsAbout(manager, order.id, where);
     }
   }
 }
 
 function ofOrder(manager: EntityManager, order: CushionOrder, where: string): KeptRow {
-  const { id, sent } = order;
+  const { id, sent, sentBefore } = order;
   return {
     texts: [
       ...contentTexts(order, where, {}),
       ...(sent ? contentTexts(sent, `${where}, as it was sent`, { alreadySent: true }) : []),
+      ...(sentBefore
+        ? contentTexts(sentBefore, `${where}, as it was sent before`, { alreadySent: true })
+        : []),
     ],
     rewrite: (change) =>
       manager.update(
         CushionOrder,
         { id },
-        { ...changedWords(order, change), sent: sent && { ...sent, ...changedWords(sent, change) } },
+        {
+          ...changedWords(order, change),
+          sent: sent && { ...sent, ...changedWords(sent, change) },
+          sentBefore: sentBefore && { ...sentBefore, ...changedWords(sentBefore, change) },
+        },
       ),
   };
 }

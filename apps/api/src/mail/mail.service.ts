@@ -70,6 +70,26 @@ export class MailService {
     });
   }
 
+  /** The last mails about something, newest first. */
+  async allAbout(manager: EntityManager, relatedId: string, kinds: readonly string[]): Promise<OutboxMail[]> {
+    return manager.find(OutboxMail, {
+      where: { relatedId, kind: In([...kinds]) },
+      order: { queuedAt: 'DESC', id: 'DESC' },
+      take: 30,
+    });
+  }
+
+  /** A person saw it come back. Only of one that went out, or perhaps did; its text is gone, so it is not sent again. */
+  async bounced(manager: EntityManager, mailId: string, note: string): Promise<boolean> {
+    const changed = await manager
+      .createQueryBuilder()
+      .update(OutboxMail)
+      .set({ state: 'bounced', lastFault: note })
+      .where('id = :mailId AND state IN (:...out)', { mailId, out: ['sent', 'perhaps-sent'] })
+      .execute();
+    return changed.affected === 1;
+  }
+
   /** What people typed into mails about something. The text of a mail that went out is no longer kept. */
   async textsAbout(manager: EntityManager, relatedId: string, where: string): Promise<KeptRow[]> {
     const mails = await manager.find(OutboxMail, { where: { relatedId }, order: { queuedAt: 'ASC' } });

@@ -18,6 +18,7 @@ const LIMITS = {
   'token-ip': { points: 60, duration: 15 * MINUTE },
   'link-ip': { points: 120, duration: MINUTE },
   'link-answer': { points: 30, duration: HOUR },
+  'link-file': { points: 120, duration: HOUR },
   'tried-sets': { points: 30, duration: MINUTE },
 } as const;
 

@@ -57,6 +57,12 @@ export class UpholsterersService {
           email: values.email,
           telephone: values.telephone ?? '',
           notes: values.notes ?? '',
+          leadDays: values.leadDays ?? null,
+          clothNotes: values.clothNotes ?? '',
+          units: values.units ?? null,
+          paper: values.paper ?? null,
+          currency: values.currency ?? null,
+          accountId: values.accountId ?? null,
           workshopId: member.workshopId,
           removedAt: null,
         }),
@@ -79,7 +85,14 @@ export class UpholsterersService {
     await this.upholsterers.manager.transaction(async (manager) => {
       const found = await this.get(member.workshopId, id, manager);
       if (!(await deleteUncited(manager, id))) {
-        const nothing = { contactName: '', email: '', telephone: '', notes: '' };
+        const nothing = {
+          contactName: '',
+          email: '',
+          telephone: '',
+          notes: '',
+          clothNotes: '',
+          accountId: null,
+        };
         await manager.save(Object.assign(found, nothing, { removedAt: new Date() }));
       }
       await this.record(manager, member, 'upholsterer.removed', id);
@@ -98,10 +111,15 @@ export class UpholsterersService {
   }
 }
 
-/** null and absent both leave a field as it is. */
+/** What has no value in a book that is empty there; null empties it. */
+const MAY_BE_EMPTY = new Set(['leadDays', 'units', 'paper', 'currency', 'accountId']);
+
+/** Absent leaves a field as it is; null does so too where a field always holds something. */
 function given(values: UpdateUpholstererDto): UpdateUpholstererDto {
   return Object.fromEntries(
-    Object.entries(values).filter(([, value]) => value !== undefined && value !== null),
+    Object.entries(values).filter(
+      ([name, value]) => value !== undefined && (value !== null || MAY_BE_EMPTY.has(name)),
+    ),
   );
 }
 

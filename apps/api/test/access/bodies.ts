@@ -58,6 +58,9 @@ export function bodiesFor(shop: Shop): Record<string, object> {
     [`POST ${O}/quotes/{quoteId}/decline`]: { reason: 'Too dear' },
     [`POST ${O}/questions`]: { text: 'Which thread?' },
     [`POST ${O}/questions/{questionId}/answer`]: { answer: 'On Friday' },
+    [`POST ${O}/payments`]: { kind: 'deposit', amountMinor: 100, currency: 'USD', note: 'by cheque' },
+    [`POST ${O}/payments/checkout`]: { amountMinor: 100 },
+    [`POST ${O}/mails/{mailId}/bounced`]: { note: 'No such address' },
     [`POST ${O}/inspections`]: {
       kind: 'received',
       outcome: 'rejected',

@@ -145,6 +145,14 @@ export const EXPECTED_ACCESS: Record<string, AccessRule> = {
   [`POST ${O}/questions`]: MAKERS,
   [`POST ${O}/questions/{questionId}/answer`]: MAKERS,
   [`POST ${O}/inspections`]: MAKERS,
+  [`POST ${O}/payments`]: MAKERS,
+  [`POST ${O}/payments/checkout`]: MAKERS,
+  [`POST ${O}/payments/{paymentId}/end`]: MAKERS,
+  [`POST ${O}/files`]: MAKERS,
+  [`GET ${O}/files/{fileId}`]: MAKERS,
+  [`DELETE ${O}/files/{fileId}`]: MAKERS,
+  [`POST ${O}/mails/{mailId}/send-again`]: MAKERS,
+  [`POST ${O}/mails/{mailId}/bounced`]: MAKERS,
 
   'GET /link/{token}': LINK,
   'GET /link/{token}/spec.pdf': LINK,
@@ -155,4 +163,8 @@ export const EXPECTED_ACCESS: Record<string, AccessRule> = {
   'POST /link/{token}/state': LINK,
   'POST /link/{token}/questions': LINK,
   'POST /link/{token}/questions/{questionId}/answer': LINK,
+  'POST /link/{token}/files': LINK,
+  'GET /link/{token}/files/{fileId}': LINK,
+  'DELETE /link/{token}/files/{fileId}': LINK,
+  'POST /payments/events': PUBLIC,
 };

@@ -1,4 +1,6 @@
+import { randomUUID } from 'node:crypto';
 import { deriveParts, type SetDocument } from '@settlewright/geometry';
+import sharp from 'sharp';
 import type { Role } from '../../src/common/access.decorator';
 import type { TestApp } from '../test-app';
 import { mailedToken } from './mails';
@@ -88,6 +90,13 @@ export async function createShop(test: TestApp, name: string): Promise<Shop> {
     ...{ name: 'Tuft', sentAt, currency: 'USD', validUntil: '2099-12-31' },
     lines: [{ text: 'Cushions', quantity: 2, unitMinor: 20_000 }],
   });
+  const O = `${P}/orders/${order.id}`;
+  const paid = { kind: 'deposit', amountMinor: 5000, currency: 'USD', note: 'by cheque' };
+  const { payments, mails } = await make<{ payments: { id: string }[]; mails: { id: string }[] }>(
+    `${O}/payments`,
+    paid,
+    200,
+  );
   const population = await make(`${W}/populations`, surveyBody({ keepRows: true }));
   const study = await make(`${S}/studies`, {
     populationId: population.id,
@@ -122,12 +131,26 @@ export async function createShop(test: TestApp, name: string): Promise<Shop> {
       orderId: order.id,
       quoteId: quotes[0]?.id ?? '',
       questionId: questions[0]?.id ?? '',
+      paymentId: payments[0]?.id ?? '',
+      mailId: mails[0]?.id ?? '',
+      fileId: await keepFile(test, owner, O),
     },
     document: draft.document,
     draftNumber: draft.number,
     partId: firstPartOf(draft.document, bench?.id ?? ''),
     linkToken: token,
   };
+}
+
+/** A photograph of the order; where no store is set up, the id of none. */
+async function keepFile(test: TestApp, owner: Person, O: string): Promise<string> {
+  if (test.settings.objectStore === null) return randomUUID();
+  const photograph = await sharp({ create: { width: 8, height: 8, channels: 3, background: '#843' } })
+    .jpeg()
+    .toBuffer();
+  const kept = await as(test, owner).post(`${O}/files`).attach('file', photograph, 'seat.jpg');
+  if (kept.status !== 200) throw new Error(`POST ${O}/files: ${kept.status} ${kept.text}`);
+  return (kept.body as { files: { id: string }[] }).files[0]?.id ?? '';
 }
 
 async function seat(test: TestApp, owner: Person, S: string, castId: string): Promise<DraftBody> {

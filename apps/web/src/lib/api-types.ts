@@ -1445,6 +1445,134 @@ export interface paths {
         patch?: never;
         trace?: never;
     };
+    "/api/workshops/{workshopId}/productions/{productionId}/orders/{orderId}/mails/{mailId}/send-again": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        get?: never;
+        put?: never;
+        post: operations["OrderLife_sendMailAgain"];
+        delete?: never;
+        options?: never;
+        head?: never;
+        patch?: never;
+        trace?: never;
+    };
+    "/api/workshops/{workshopId}/productions/{productionId}/orders/{orderId}/mails/{mailId}/bounced": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        get?: never;
+        put?: never;
+        post: operations["OrderLife_mailBounced"];
+        delete?: never;
+        options?: never;
+        head?: never;
+        patch?: never;
+        trace?: never;
+    };
+    "/api/workshops/{workshopId}/productions/{productionId}/orders/{orderId}/payments/checkout": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        get?: never;
+        put?: never;
+        post: operations["Deposits_begin"];
+        delete?: never;
+        options?: never;
+        head?: never;
+        patch?: never;
+        trace?: never;
+    };
+    "/api/workshops/{workshopId}/productions/{productionId}/orders/{orderId}/payments": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        get?: never;
+        put?: never;
+        post: operations["Deposits_record"];
+        delete?: never;
+        options?: never;
+        head?: never;
+        patch?: never;
+        trace?: never;
+    };
+    "/api/workshops/{workshopId}/productions/{productionId}/orders/{orderId}/payments/{paymentId}/end": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        get?: never;
+        put?: never;
+        post: operations["Deposits_end"];
+        delete?: never;
+        options?: never;
+        head?: never;
+        patch?: never;
+        trace?: never;
+    };
+    "/api/payments/events": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        get?: never;
+        put?: never;
+        post: operations["PaymentNews_receive"];
+        delete?: never;
+        options?: never;
+        head?: never;
+        patch?: never;
+        trace?: never;
+    };
+    "/api/workshops/{workshopId}/productions/{productionId}/orders/{orderId}/files": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        get?: never;
+        put?: never;
+        post: operations["Files_add"];
+        delete?: never;
+        options?: never;
+        head?: never;
+        patch?: never;
+        trace?: never;
+    };
+    "/api/workshops/{workshopId}/productions/{productionId}/orders/{orderId}/files/{fileId}": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        get: operations["Files_read"];
+        put?: never;
+        post?: never;
+        delete: operations["Files_remove"];
+        options?: never;
+        head?: never;
+        patch?: never;
+        trace?: never;
+    };
     "/api/link/{token}": {
         parameters: {
             query?: never;
@@ -1584,6 +1712,38 @@ export interface paths {
         put?: never;
         post: operations["LinkLife_answer"];
         delete?: never;
+        options?: never;
+        head?: never;
+        patch?: never;
+        trace?: never;
+    };
+    "/api/link/{token}/files": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        get?: never;
+        put?: never;
+        post: operations["LinkFiles_add"];
+        delete?: never;
+        options?: never;
+        head?: never;
+        patch?: never;
+        trace?: never;
+    };
+    "/api/link/{token}/files/{fileId}": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        get: operations["LinkFiles_read"];
+        put?: never;
+        post?: never;
+        delete: operations["LinkFiles_remove"];
         options?: never;
         head?: never;
         patch?: never;
@@ -3660,6 +3820,15 @@ export interface components {
             email: string;
             telephone: string;
             notes: string;
+            /** @description working days */
+            leadDays: number | null;
+            clothNotes: string;
+            /** @enum {string|null} */
+            units: "feet-inches" | "decimal-inches" | "millimetres" | null;
+            /** @enum {string|null} */
+            paper: "a4" | "letter" | null;
+            currency: string | null;
+            accountId: string | null;
             /** Format: date-time */
             createdAt: string;
         };
@@ -3676,6 +3845,18 @@ export interface components {
             email: string;
             telephone?: string;
             notes?: string;
+            /** @description working days */
+            leadDays?: number | null;
+            /** @description cloth they like to work with, and which they do not */
+            clothNotes?: string;
+            /** @enum {string|null} */
+            units?: "feet-inches" | "decimal-inches" | "millimetres" | null;
+            /** @enum {string|null} */
+            paper?: "a4" | "letter" | null;
+            /** @description ISO 4217, as USD */
+            currency?: string | null;
+            /** @description their connected account at the payment provider, as acct_…; without one deposits are recorded by hand */
+            accountId?: string | null;
         };
         UpdateUpholstererDto: {
             name?: string;
@@ -3684,6 +3865,18 @@ export interface components {
             email?: string;
             telephone?: string;
             notes?: string;
+            /** @description working days */
+            leadDays?: number | null;
+            /** @description cloth they like to work with, and which they do not */
+            clothNotes?: string;
+            /** @enum {string|null} */
+            units?: "feet-inches" | "decimal-inches" | "millimetres" | null;
+            /** @enum {string|null} */
+            paper?: "a4" | "letter" | null;
+            /** @description ISO 4217, as USD */
+            currency?: string | null;
+            /** @description their connected account at the payment provider, as acct_…; without one deposits are recorded by hand */
+            accountId?: string | null;
         };
         /** @enum {string} */
         OrderState: "draft" | "sent" | "quoted" | "agreed" | "first-article" | "in-work" | "shipped" | "received" | "closed" | "cancelled";
@@ -4176,6 +4369,54 @@ export interface components {
             note: string;
             photoIds: string[];
         };
+        /** @enum {string} */
+        OrderFileType: "image/jpeg" | "application/pdf";
+        FileDto: {
+            /** Format: uuid */
+            id: string;
+            side: components["schemas"]["OrderSide"];
+            byName: string;
+            /** Format: date-time */
+            at: string;
+            /** @description exchanged with the upholsterer who has the order now */
+            current: boolean;
+            name: string;
+            type: components["schemas"]["OrderFileType"];
+            bytes: number;
+            widthPx: number | null;
+            heightPx: number | null;
+            cushionMark: string | null;
+        };
+        /** @enum {string} */
+        PaymentKind: "deposit" | "refund";
+        /** @enum {string} */
+        PaymentState: "begun" | "paid" | "lapsed";
+        PaymentDto: {
+            /** Format: uuid */
+            id: string;
+            side: components["schemas"]["OrderSide"];
+            byName: string;
+            /** Format: date-time */
+            at: string;
+            /** @description exchanged with the upholsterer who has the order now */
+            current: boolean;
+            kind: components["schemas"]["PaymentKind"];
+            byHand: boolean;
+            amountMinor: number;
+            currency: string;
+            state: components["schemas"]["PaymentState"];
+            note: string;
+            /** Format: date-time */
+            settledAt: string | null;
+        };
+        OrderMailAboutDto: {
+            /** Format: uuid */
+            id: string;
+            subject: string;
+            state: components["schemas"]["MailState"];
+            /** Format: date-time */
+            at: string;
+        };
         OrderLifeDto: {
             toleranceMm: number;
             /** @description the revision that the present one replaced */
@@ -4194,6 +4435,14 @@ export interface components {
             questions: components["schemas"]["QuestionDto"][];
             /** @description newest first */
             inspections: components["schemas"]["InspectionDto"][];
+            /** @description oldest first */
+            files: components["schemas"]["FileDto"][];
+            /** @description oldest first; for the upholsterer only what was settled */
+            payments: components["schemas"]["PaymentDto"][];
+            /** @description a deposit can be paid to their account; otherwise it is recorded by hand */
+            depositOnline: boolean;
+            /** @description newest first; for the workshop only */
+            mails: components["schemas"]["OrderMailAboutDto"][];
         };
         RecordQuoteDto: {
             lines: components["schemas"]["QuoteLineDto"][];
@@ -4238,6 +4487,36 @@ export interface components {
             note?: string;
             /** @description files of the order */
             photoIds?: string[];
+        };
+        MailBouncedDto: {
+            /** @description what came back */
+            note: string;
+        };
+        BeginDepositDto: {
+            /** @description in the currency of the accepted quote */
+            amountMinor: number;
+        };
+        CheckoutDto: {
+            /** @description the payment provider's page */
+            url: string;
+        };
+        RecordPaymentDto: {
+            /** @description in the currency of the accepted quote */
+            amountMinor: number;
+            kind: components["schemas"]["PaymentKind"];
+            /** @description ISO 4217, as USD */
+            currency: string;
+            /** @description how and when: "bank transfer, 2 February" */
+            note: string;
+        };
+        UploadFileDto: {
+            /**
+             * Format: binary
+             * @description JPEG, PNG, WebP or PDF, at most 15 MB
+             */
+            file: string;
+            /** @description the cushion that it shows, as C1 */
+            cushionMark?: string;
         };
         PublicWorkshopDto: {
             name: string;
@@ -8542,6 +8821,311 @@ export interface operations {
             };
         };
     };
+    OrderLife_sendMailAgain: {
+        parameters: {
+            query?: never;
+            header?: never;
+            path: {
+                productionId: string;
+                orderId: string;
+                mailId: string;
+                workshopId: unknown;
+            };
+            cookie?: never;
+        };
+        requestBody?: never;
+        responses: {
+            200: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["OrderLifeDto"];
+                };
+            };
+            /** @description what went wrong (RFC 9457) */
+            default: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemBody"];
+                };
+            };
+        };
+    };
+    OrderLife_mailBounced: {
+        parameters: {
+            query?: never;
+            header?: never;
+            path: {
+                productionId: string;
+                orderId: string;
+                mailId: string;
+                workshopId: unknown;
+            };
+            cookie?: never;
+        };
+        requestBody: {
+            content: {
+                "application/json": components["schemas"]["MailBouncedDto"];
+            };
+        };
+        responses: {
+            200: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["OrderLifeDto"];
+                };
+            };
+            /** @description what went wrong (RFC 9457) */
+            default: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemBody"];
+                };
+            };
+        };
+    };
+    Deposits_begin: {
+        parameters: {
+            query?: never;
+            header?: never;
+            path: {
+                productionId: string;
+                orderId: string;
+                workshopId: unknown;
+            };
+            cookie?: never;
+        };
+        requestBody: {
+            content: {
+                "application/json": components["schemas"]["BeginDepositDto"];
+            };
+        };
+        responses: {
+            200: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["CheckoutDto"];
+                };
+            };
+            /** @description what went wrong (RFC 9457) */
+            default: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemBody"];
+                };
+            };
+        };
+    };
+    Deposits_record: {
+        parameters: {
+            query?: never;
+            header?: never;
+            path: {
+                productionId: string;
+                orderId: string;
+                workshopId: unknown;
+            };
+            cookie?: never;
+        };
+        requestBody: {
+            content: {
+                "application/json": components["schemas"]["RecordPaymentDto"];
+            };
+        };
+        responses: {
+            200: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["OrderLifeDto"];
+                };
+            };
+            /** @description what went wrong (RFC 9457) */
+            default: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemBody"];
+                };
+            };
+        };
+    };
+    Deposits_end: {
+        parameters: {
+            query?: never;
+            header?: never;
+            path: {
+                productionId: string;
+                orderId: string;
+                paymentId: string;
+                workshopId: unknown;
+            };
+            cookie?: never;
+        };
+        requestBody?: never;
+        responses: {
+            200: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["OrderLifeDto"];
+                };
+            };
+            /** @description what went wrong (RFC 9457) */
+            default: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemBody"];
+                };
+            };
+        };
+    };
+    PaymentNews_receive: {
+        parameters: {
+            query?: never;
+            header: {
+                "stripe-signature": string;
+            };
+            path?: never;
+            cookie?: never;
+        };
+        requestBody?: never;
+        responses: {
+            204: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content?: never;
+            };
+            /** @description what went wrong (RFC 9457) */
+            default: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemBody"];
+                };
+            };
+        };
+    };
+    Files_add: {
+        parameters: {
+            query?: never;
+            header?: never;
+            path: {
+                productionId: string;
+                orderId: string;
+                workshopId: unknown;
+            };
+            cookie?: never;
+        };
+        requestBody: {
+            content: {
+                "multipart/form-data": components["schemas"]["UploadFileDto"];
+            };
+        };
+        responses: {
+            200: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["OrderLifeDto"];
+                };
+            };
+            /** @description what went wrong (RFC 9457) */
+            default: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemBody"];
+                };
+            };
+        };
+    };
+    Files_read: {
+        parameters: {
+            query?: never;
+            header?: never;
+            path: {
+                productionId: string;
+                orderId: string;
+                fileId: string;
+                workshopId: unknown;
+            };
+            cookie?: never;
+        };
+        requestBody?: never;
+        responses: {
+            200: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": string;
+                };
+            };
+            /** @description what went wrong (RFC 9457) */
+            default: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemBody"];
+                };
+            };
+        };
+    };
+    Files_remove: {
+        parameters: {
+            query?: never;
+            header?: never;
+            path: {
+                productionId: string;
+                orderId: string;
+                fileId: string;
+                workshopId: unknown;
+            };
+            cookie?: never;
+        };
+        requestBody?: never;
+        responses: {
+            200: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["OrderLifeDto"];
+                };
+            };
+            /** @description what went wrong (RFC 9457) */
+            default: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemBody"];
+                };
+            };
+        };
+    };
     Link_read: {
         parameters: {
             query?: never;
@@ -8817,6 +9401,102 @@ export interface operations {
                 "application/json": components["schemas"]["AnswerQuestionDto"];
             };
         };
+        responses: {
+            200: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["OrderLifeDto"];
+                };
+            };
+            /** @description what went wrong (RFC 9457) */
+            default: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemBody"];
+                };
+            };
+        };
+    };
+    LinkFiles_add: {
+        parameters: {
+            query?: never;
+            header?: never;
+            path: {
+                token: string;
+            };
+            cookie?: never;
+        };
+        requestBody: {
+            content: {
+                "multipart/form-data": components["schemas"]["UploadFileDto"];
+            };
+        };
+        responses: {
+            200: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["OrderLifeDto"];
+                };
+            };
+            /** @description what went wrong (RFC 9457) */
+            default: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemBody"];
+                };
+            };
+        };
+    };
+    LinkFiles_read: {
+        parameters: {
+            query?: never;
+            header?: never;
+            path: {
+                token: string;
+                fileId: string;
+            };
+            cookie?: never;
+        };
+        requestBody?: never;
+        responses: {
+            200: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": string;
+                };
+            };
+            /** @description what went wrong (RFC 9457) */
+            default: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemBody"];
+                };
+            };
+        };
+    };
+    LinkFiles_remove: {
+        parameters: {
+            query?: never;
+            header?: never;
+            path: {
+                token: string;
+                fileId: string;
+            };
+            cookie?: never;
+        };
+        requestBody?: never;
         responses: {
             200: {
                 headers: {

@@ -2,8 +2,10 @@ import { Body, Controller, Get, HttpCode, Post } from '@nestjs/common';
 import { ApiOkResponse, ApiParam, ApiTags } from '@nestjs/swagger';
 import { Access, Member, type MemberInfo } from '../../common/access.decorator';
 import { IdParam } from '../../common/id-param';
+import { MailBouncedDto } from '../dto/write-order.dto';
 import { InspectDto } from '../inspections/inspection.dto';
 import { InspectionsService } from '../inspections/inspections.service';
+import { OrderCorrespondence } from '../order-correspondence.service';
 import { AnswerQuestionDto, AskQuestionDto } from '../questions/question.dto';
 import { QuestionsService } from '../questions/questions.service';
 import { DeclineQuoteDto, RecordQuoteDto } from '../quotes/quote.dto';
@@ -24,6 +26,7 @@ export class OrderLifeController {
     private readonly quotes: QuotesService,
     private readonly questions: QuestionsService,
     private readonly inspections: InspectionsService,
+    private readonly correspondence: OrderCorrespondence,
   ) {}
 
   @Get('life')
@@ -119,6 +122,35 @@ export class OrderLifeController {
   ): Promise<OrderLifeDto> {
     const place = { workshopId: member.workshopId, productionId, orderId };
     await this.inspections.inspect(member, place, body);
+    return this.life.forMember(place);
+  }
+
+  @Post('mails/:mailId/send-again')
+  @HttpCode(200)
+  @ApiOkResponse({ type: OrderLifeDto })
+  async sendMailAgain(
+    @Member() member: MemberInfo,
+    @IdParam('productionId') productionId: string,
+    @IdParam('orderId') orderId: string,
+    @IdParam('mailId') mailId: string,
+  ): Promise<OrderLifeDto> {
+    const place = { workshopId: member.workshopId, productionId, orderId };
+    await this.correspondence.sendMailAgain(member, place, mailId);
+    return this.life.forMember(place);
+  }
+
+  @Post('mails/:mailId/bounced')
+  @HttpCode(200)
+  @ApiOkResponse({ type: OrderLifeDto })
+  async mailBounced(
+    @Member() member: MemberInfo,
+    @IdParam('productionId') productionId: string,
+    @IdParam('orderId') orderId: string,
+    @IdParam('mailId') mailId: string,
+    @Body() body: MailBouncedDto,
+  ): Promise<OrderLifeDto> {
+    const place = { workshopId: member.workshopId, productionId, orderId };
+    await this.correspondence.mailBounced(member, place, mailId, body.note);
     return this.life.forMember(place);
   }
 }

@@ -1,5 +1,7 @@
 import { ApiProperty, ApiPropertyOptional } from '@nestjs/swagger';
 import { MAIL_STATES, type MailState } from '../../mail/entities/outbox-mail.entity';
+import { PaymentDto } from '../deposits/deposit.dto';
+import { FileDto } from '../files/file.dto';
 import { InspectionDto } from '../inspections/inspection.dto';
 import { MARKED_STATES, type MarkedState } from '../order-states';
 import { QuestionDto } from '../questions/question.dto';
@@ -72,4 +74,12 @@ export class OrderLifeDto {
   questions: QuestionDto[];
   @ApiProperty({ type: [InspectionDto], description: 'newest first' })
   inspections: InspectionDto[];
+  @ApiProperty({ type: [FileDto], description: 'oldest first' })
+  files: FileDto[];
+  @ApiProperty({ type: [PaymentDto], description: 'oldest first; for the upholsterer only what was settled' })
+  payments: PaymentDto[];
+  @ApiProperty({ description: 'a deposit can be paid to their account; otherwise it is recorded by hand' })
+  depositOnline: boolean;
+  @ApiProperty({ type: [OrderMailAboutDto], description: 'newest first; for the workshop only' })
+  mails: OrderMailAboutDto[];
 }

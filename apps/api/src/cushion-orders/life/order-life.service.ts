@@ -1,14 +1,19 @@
 import { Injectable } from '@nestjs/common';
 import { InjectDataSource } from '@nestjs/typeorm';
 import { DataSource } from 'typeorm';
+import { MailService } from '../../mail/mail.service';
+import { PaymentProvider } from '../../payments/payment-provider.service';
 import { WorkshopsService } from '../../workshops/workshops.service';
+import { OrderPayment } from '../deposits/order-payment.entity';
 import type { CushionOrder } from '../entities/cushion-order.entity';
+import { OrderFile } from '../files/order-file.entity';
 import { OrderInspection } from '../inspections/order-inspection.entity';
 import { LinkService } from '../link.service';
 import { findOrder, type OrderPlace } from '../order-access';
 import { acceptedQuote, acknowledgementOf, deliveryOf, firstArticleOf } from '../order-agreement';
 import { contactOf } from '../order-contact';
 import { toleranceOf } from '../order-content';
+import { OUTGOING_KINDS } from '../order-mail';
 import { marksAfter } from '../order-marks.service';
 import { mayQuote } from '../order-states';
 import { OrderQuestion } from '../questions/order-question.entity';
@@ -16,12 +21,21 @@ import { OrderQuote } from '../quotes/order-quote.entity';
 import { SentCushions } from '../sent-cushions.service';
 import { orderChanges } from './order-changes';
 import type { OrderLifeDto } from './order-life.dto';
-import { inspectionDto, type NameOf, questionDto, quoteDto } from './order-rows';
+import {
+  fileDto,
+  inspectionDto,
+  mailDto,
+  type NameOf,
+  paymentDto,
+  questionDto,
+  quoteDto,
+} from './order-rows';
 
 interface Reader {
   nameOf: NameOf;
   /** What was exchanged with an earlier upholsterer is the workshop's own. */
   only: { upholstererId?: string };
+  forShop: boolean;
 }
 
 /** What has passed between the two sides of an order, as either of them may read it. */
@@ -32,11 +46,13 @@ export class OrderLife {
     private readonly links: LinkService,
     private readonly workshops: WorkshopsService,
     private readonly cushions: SentCushions,
+    private readonly mail: MailService,
+    private readonly provider: PaymentProvider,
   ) {}
 
   async forMember(place: OrderPlace): Promise<OrderLifeDto> {
     const order = await findOrder(this.dataSource.manager, place);
-    return this.read(order, { nameOf: (_side, _id, name) => name, only: {} });
+    return this.read(order, { nameOf: (_side, _id, name) => name, only: {}, forShop: true });
   }
 
   async forLink(token: string): Promise<OrderLifeDto> {
@@ -45,16 +61,24 @@ export class OrderLife {
     const contact = await contactOf(this.dataSource.manager, order, sent);
     const nameOf: NameOf = (side, byId, name) =>
       side === 'workshop' && byId !== contact.id ? workshop.name : name;
-    return this.read(order, { nameOf, only: { upholstererId: order.upholstererId ?? undefined } });
+    const only = { upholstererId: order.upholstererId ?? undefined };
+    return this.read(order, { nameOf, only, forShop: false });
   }
 
-  private async read(order: CushionOrder, { nameOf, only }: Reader): Promise<OrderLifeDto> {
+  private async read(order: CushionOrder, { nameOf, only, forShop }: Reader): Promise<OrderLifeDto> {
     const { manager } = this.dataSource;
     const where = { orderId: order.id, ...only };
     const newest = { at: 'DESC', id: 'ASC' } as const;
+    const oldest = { at: 'ASC', id: 'ASC' } as const;
+    const settled = forShop ? {} : { state: 'paid' as const };
+    const [files, payments, mails] = await Promise.all([
+      manager.find(OrderFile, { where: { ...where, state: 'kept' }, order: oldest }),
+      manager.find(OrderPayment, { where: { ...where, ...settled }, order: oldest }),
+      forShop ? this.mail.allAbout(manager, order.id, OUTGOING_KINDS) : [],
+    ]);
     const [quotes, questions, inspections, acknowledged, accepted, { timeZone }] = await Promise.all([
       manager.find(OrderQuote, { where, order: newest }),
-      manager.find(OrderQuestion, { where, order: { at: 'ASC', id: 'ASC' } }),
+      manager.find(OrderQuestion, { where, order: oldest }),
       manager.find(OrderInspection, { where, order: newest }),
       acknowledgementOf(manager, order),
       acceptedQuote(manager, order),
@@ -79,6 +103,10 @@ export class OrderLife {
       quotes: quotes.map((quote) => quoteDto(quote, order, { nameOf, timeZone })),
       questions: questions.map((question) => questionDto(question, order, nameOf)),
       inspections: inspections.map((inspection) => inspectionDto(inspection, order, nameOf)),
+      files: files.map((file) => fileDto(file, order, nameOf)),
+      payments: payments.map((payment) => paymentDto(payment, order, nameOf)),
+      depositOnline: this.provider.isSetUp && typeof order.upholsterer?.accountId === 'string',
+      mails: mails.map(mailDto),
     };
   }
 

@@ -1,6 +1,11 @@
 import { todayIn } from '../../common/calendar-day';
+import type { OutboxMail } from '../../mail/entities/outbox-mail.entity';
+import type { PaymentDto } from '../deposits/deposit.dto';
+import type { OrderPayment } from '../deposits/order-payment.entity';
 import type { CushionOrder } from '../entities/cushion-order.entity';
 import type { OfOrder } from '../entities/of-order';
+import type { FileDto } from '../files/file.dto';
+import type { OrderFile } from '../files/order-file.entity';
 import type { InspectionDto } from '../inspections/inspection.dto';
 import type { OrderInspection } from '../inspections/order-inspection.entity';
 import { judgeCushion, judgeSizes } from '../inspections/size-verdict';
@@ -10,6 +15,7 @@ import type { QuestionDto } from '../questions/question.dto';
 import type { OrderQuote } from '../quotes/order-quote.entity';
 import type { QuoteDto } from '../quotes/quote.dto';
 import type { OfOrderDto } from './of-order.dto';
+import type { OrderMailAboutDto } from './order-life.dto';
 
 /** Who may be named to whoever reads: of the workshop's people the other side knows only the contact. */
 export type NameOf = (side: OfOrder['side'], byId: string | null, byName: string) => string;
@@ -67,4 +73,22 @@ export function inspectionDto(
       return { mark: row.mark, sizes, verdict: judgeCushion(sizes), note: row.note };
     }),
   };
+}
+
+export function fileDto(file: OrderFile, order: CushionOrder, nameOf: NameOf): FileDto {
+  const { name, type, bytes, widthPx, heightPx, cushionMark } = file;
+  return { ...ofOrder(file, order, nameOf), ...{ name, type, bytes, widthPx, heightPx, cushionMark } };
+}
+
+export function paymentDto(payment: OrderPayment, order: CushionOrder, nameOf: NameOf): PaymentDto {
+  const { kind, byHand, amountMinor, currency, state, note, settledAt } = payment;
+  return {
+    ...ofOrder(payment, order, nameOf),
+    ...{ kind, byHand, amountMinor, currency, state, note },
+    settledAt: settledAt?.toISOString() ?? null,
+  };
+}
+
+export function mailDto({ id, subject, state, queuedAt }: OutboxMail): OrderMailAboutDto {
+  return { id, subject, state, at: queuedAt.toISOString() };
 }
