@@ -39,7 +39,7 @@ export default tseslint.config(
     languageOptions: { globals: globals.node },
   },
   {
-    files: ['apps/web/public/**/*.js', 'bench/room-scene.mjs'],
+    files: ['apps/web/public/**/*.js', 'bench/room-scene.mjs', 'bench/drag-script.mjs', 'bench/lib/drag.mjs'],
     languageOptions: { globals: { ...globals.node, ...globals.browser } },
   },
   prettier,

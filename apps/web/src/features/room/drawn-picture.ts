@@ -17,6 +17,8 @@ export interface Carried extends Motion {
 /** A picture for drawing alone: situation, sheet and bodies are those that were counted last. */
 export interface DrawnPicture extends RoomPicture {
   carried?: Carried | undefined;
+  /** Pieces that are of another shape than when they were counted, by id. */
+  reshaped?: ReadonlySet<string>;
 }
 
 const SAME_MM = 1e-6;
@@ -65,10 +67,14 @@ export function carriedIn(document: SetDocument, counted: SetDocument): Carried 
 /** Draws a set in the hand over what was counted last. */
 export function drawnPicture(document: SetDocument, counted: RoomPicture): DrawnPicture {
   if (document === counted.document) return counted;
+  const carried = carriedIn(document, counted.document);
+  const before = new Set(counted.document.pieces);
+  const anew = document.pieces.filter((piece) => !before.has(piece) && !carried?.before.has(piece.id));
   return {
     ...counted,
     document,
     parts: deriveParts(document),
-    carried: carriedIn(document, counted.document),
+    carried,
+    reshaped: new Set(anew.map(({ id }) => id)),
   };
 }

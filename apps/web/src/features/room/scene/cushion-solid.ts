@@ -2,7 +2,7 @@ import type { Vec3 } from '@settlewright/geometry';
 import { leanedInBy } from './back-print.ts';
 import { pressedBy, type SeatPrint } from './seat-print.ts';
 import type { SoftPart } from './soft-part.ts';
-import type { SolidArrays } from './solid-arrays.ts';
+import type { SolidSink } from './solid-arrays.ts';
 import { add, cross, dot, normalise, scale, subtract } from './vectors.ts';
 
 /** Edge of the cover, its crown over the panel and the width over which the crown rises, mm. */
@@ -49,27 +49,24 @@ function normalsOf(sheet: Sheet): Sheet {
   );
 }
 
-function addSheet(out: SolidArrays, sheet: Sheet, normals: Sheet, material: number) {
-  const start = out.positions.length;
+/** Corners of the two triangles between two lines of a sheet: how far down and across. */
+const CORNERS = [0, 0, 1, 0, 1, 1, 0, 0, 1, 1, 0, 1] as const;
+
+/** Made anew for each frame of a pull: plain loops, as lists and spreads cost ten times as much. */
+function addSheet(out: SolidSink, sheet: Sheet, normals: Sheet, material: number) {
+  const { positions, normals: facing, materials, roundPositions, roundNormals } = out;
   for (let row = 0; row + 1 < sheet.length; row++) {
-    for (let column = 0; column + 1 < (sheet[row]?.length ?? 0); column++) {
-      for (const [r, c] of [
-        [row, column],
-        [row + 1, column],
-        [row + 1, column + 1],
-        [row, column],
-        [row + 1, column + 1],
-        [row, column + 1],
-      ] as const) {
-        out.positions.push(...(sheet[r]?.[c] ?? [0, 0, 0]));
-        out.normals.push(...(normals[r]?.[c] ?? [0, 1, 0]));
-        out.materials.push(material);
+    for (let column = 0; column + 1 < sheet[row]!.length; column++) {
+      for (let n = 0; n < CORNERS.length; n += 2) {
+        const [r, c] = [row + CORNERS[n]!, column + CORNERS[n + 1]!];
+        const [at, normal] = [sheet[r]![c]!, normals[r]![c]!];
+        positions.push(at[0], at[1], at[2]);
+        facing.push(normal[0], normal[1], normal[2]);
+        roundPositions.push(at[0], at[1], at[2]);
+        roundNormals.push(normal[0], normal[1], normal[2]);
+        materials.push(material);
       }
     }
-  }
-  for (let n = start; n < out.positions.length; n++) {
-    out.roundPositions.push(out.positions[n] ?? 0);
-    out.roundNormals.push(out.normals[n] ?? 0);
   }
 }
 
@@ -83,7 +80,7 @@ function rimOf(panel: Sheet): Vec3[] {
   return [...round, round[0]!];
 }
 
-function addLoop(out: SolidArrays, loop: readonly Vec3[], weight: number) {
+function addLoop(out: SolidSink, loop: readonly Vec3[], weight: number) {
   loop.slice(1).forEach((point, n) => {
     out.edges.push(...loop[n]!, ...point);
     out.edgeWeights.push(weight);
@@ -110,7 +107,7 @@ function stepsOf({ kind, hollowAt }: SoftPart, prints: readonly SeatPrint[]): [n
  * A cushion as it is upholstered: a crowned panel over a boxing with a welt between, all inside the measured box, and
  * pressed in where somebody sits or leans. The seat's panel looks up, the back's forwards.
  */
-export function addCushion(out: SolidArrays, soft: SoftPart, material: number, prints: readonly SeatPrint[]) {
+export function addCushion(out: SolidSink, soft: SoftPart, material: number, prints: readonly SeatPrint[]) {
   const { centre, across, outward, down, thickMm: thick, hollowAt } = soft;
   const [a, b] = [soft.widthMm / 2, soft.lengthMm / 2];
   const round = Math.min(ROUND_MM, thick * 0.35, a * 0.4, b * 0.4);

@@ -38,7 +38,10 @@ describe('solids of pieces', () => {
     const joined = joinSolids(partsOf(document).map((parts) => solidsOf(parts)));
     const merged = mergeParts(partsOf(document).flat());
     for (const [list, numbers] of Object.entries(merged)) {
-      expect(joined[list as keyof typeof joined]).toEqual(Float32Array.from(numbers));
+      const packed = joined[list as keyof typeof joined];
+      expect(packed.length).toBe(numbers.length);
+      const off = numbers.map((value: number, n: number) => Math.abs(value - packed[n]!));
+      expect(Math.max(0, ...off)).toBeLessThan(0.01);
     }
   });
 });

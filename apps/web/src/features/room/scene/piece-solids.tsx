@@ -4,6 +4,7 @@ import type { BufferGeometry } from 'three';
 import type { Carried, DrawnPicture } from '../drawn-picture';
 import { linesOf } from './ink-lines';
 import { joinSolids, solidsOf, type PackedSolids } from './packed-solids';
+import { ReshapedSolids } from './reshaped-solids';
 import { printsByPiece } from './seat-print';
 import type { SceneMaterials } from './shaders';
 import { surfaceOf } from './solids';
@@ -76,24 +77,30 @@ interface Props {
 
 /** All pieces; the chosen ones are drawn apart, for their outline and as they change most. */
 export function PieceSolids({ picture, letter, chosenIds, showBodies, materials }: Props) {
-  const { document, carried } = picture;
+  const { document, carried, reshaped } = picture;
   const visible = visiblePieces(document, letter);
   const printsOn = printsByPiece(showBodies ? picture.bodies : []);
   const drawn = (piece: Piece) => solidsOf(derivePieceParts(piece, document), printsOn(piece.id));
   return [false, true].flatMap((chosen) => {
     const all = visible.filter(({ id }) => chosenIds.includes(id) === chosen);
-    const still = all.filter(({ id }) => !carried?.before.has(id)).map(drawn);
+    const still = all.filter(({ id }) => !carried?.before.has(id) && !reshaped?.has(id)).map(drawn);
     // Carried pieces are the solids of before, set down elsewhere.
     const along = all.flatMap(({ id }) => carried?.before.get(id) ?? []).map(drawn);
-    return [
+    const anew = all.filter(({ id }) => reshaped?.has(id)).map((piece) => derivePieceParts(piece, document));
+    const kept = [
       { pieces: still, by: undefined },
       { pieces: along, by: carried },
-    ]
-      .filter(({ pieces }) => pieces.length > 0)
-      .map(({ pieces, by }, n) => (
+    ].filter(({ pieces }) => pieces.length > 0);
+    const look = { letter, chosen, materials };
+    return [
+      ...kept.map(({ pieces, by }, n) => (
         <group key={`${chosen} ${n}`} {...setDown(by)}>
-          <Solids pieces={pieces} letter={letter} chosen={chosen} materials={materials} />
+          <Solids pieces={pieces} {...look} />
         </group>
-      ));
+      )),
+      anew.length > 0 && (
+        <ReshapedSolids key={`${chosen} anew`} pieces={anew} printsOn={printsOn} {...look} />
+      ),
+    ];
   });
 }

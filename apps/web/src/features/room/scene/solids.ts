@@ -3,8 +3,8 @@ import { BufferAttribute, BufferGeometry, ShapeUtils, Vector2 } from 'three';
 import { addCushion } from './cushion-solid';
 import type { SeatPrint } from './seat-print';
 import { softPart } from './soft-part';
-import type { SolidArrays } from './solid-arrays';
-import { grainsOf } from './timber';
+import { eachSolidList, type SolidArrays, type SolidSink } from './solid-arrays';
+import { grainsOf, hasGrain } from './timber';
 import { add, normalise, partAxes, scale } from './vectors';
 
 /** Order of the materials in the palette of the shaders. */
@@ -23,7 +23,7 @@ function placer(part: Part): { at: Place; along: Place } {
 }
 
 /** Outline of a solid in its own x-y or x-z plane, with what is needed to extrude it. */
-function addFace(out: SolidArrays, corners: Vec3[], normal: Vec3, material: number) {
+function addFace(out: SolidSink, corners: Vec3[], normal: Vec3, material: number) {
   const [a, b, c, d] = corners as [Vec3, Vec3, Vec3, Vec3];
   for (const corner of [a, b, c, a, c, d]) {
     out.positions.push(...corner);
@@ -32,12 +32,12 @@ function addFace(out: SolidArrays, corners: Vec3[], normal: Vec3, material: numb
   }
 }
 
-function addEdge(out: SolidArrays, a: Vec3, b: Vec3, weight: number) {
+function addEdge(out: SolidSink, a: Vec3, b: Vec3, weight: number) {
   out.edges.push(...a, ...b);
   out.edgeWeights.push(weight);
 }
 
-function addBox(out: SolidArrays, part: Part, size: Vec3, material: number, weight: number) {
+function addBox(out: SolidSink, part: Part, size: Vec3, material: number, weight: number) {
   const { at, along } = placer(part);
   const [x, y, z] = [size[0] / 2, size[1] / 2, size[2] / 2];
   addFace(out, [at(-x, y, z), at(x, y, z), at(x, y, -z), at(-x, y, -z)], along(0, 1, 0), material);
@@ -55,7 +55,7 @@ function addBox(out: SolidArrays, part: Part, size: Vec3, material: number, weig
   }
 }
 
-function addCylinder(out: SolidArrays, part: Part, radius: number, height: number, material: number) {
+function addCylinder(out: SolidSink, part: Part, radius: number, height: number, material: number) {
   const { at, along } = placer(part);
   const h = height / 2;
   const start = out.positions.length;
@@ -73,8 +73,13 @@ function addCylinder(out: SolidArrays, part: Part, radius: number, height: numbe
     addEdge(out, qa, qb, 1);
     addEdge(out, pa, pb, 1);
   }
-  out.roundPositions.push(...out.positions.slice(start));
-  out.roundNormals.push(...out.normals.slice(start));
+  for (const [list, again] of [
+    [out.positions, out.roundPositions],
+    [out.normals, out.roundNormals],
+  ] as const) {
+    const made = list.slice(start);
+    for (let n = 0; n < made.length; n++) again.push(made[n]!);
+  }
 }
 
 /** Sides that meet at less than this are one curved face: no ink runs between them, radians. */
@@ -83,7 +88,7 @@ const CORNER_RAD = 0.35;
 const turns = ([ax, ay]: [number, number], [bx, by]: [number, number]): boolean =>
   Math.abs(Math.atan2(ax * by - ay * bx, ax * bx + ay * by)) > CORNER_RAD;
 
-function addPrism(out: SolidArrays, part: Part, solid: Extract<Solid, { shape: 'prism' }>, material: number) {
+function addPrism(out: SolidSink, part: Part, solid: Extract<Solid, { shape: 'prism' }>, material: number) {
   const { at, along } = placer(part);
   const outline = solid.outlineMm;
   const z = solid.depthMm / 2;
@@ -106,24 +111,21 @@ function addPrism(out: SolidArrays, part: Part, solid: Extract<Solid, { shape: '
   });
 }
 
-/**
- * Merges parts into one list of triangles and one of edges: a few draw calls for the whole set.
- * Seats are pressed in by those who sit on their piece.
- */
-export function mergeParts(
+function addGrains({ positions, grains }: SolidSink, part: Part, start: number) {
+  if (!hasGrain(part)) {
+    for (let n = start; n < positions.length; n += 3) grains.push(0, 0, 0, 0);
+    return;
+  }
+  const made = grainsOf(part, positions.slice(start));
+  for (let n = 0; n < made.length; n++) grains.push(made[n]!);
+}
+
+/** Writes triangles and edges of parts behind those that are there. Seats are pressed in by those who sit on their piece. */
+export function addParts(
+  out: SolidSink,
   parts: readonly Part[],
-  printsOn: (pieceId: string) => readonly SeatPrint[] = () => [],
-): SolidArrays {
-  const out: SolidArrays = {
-    positions: [],
-    normals: [],
-    materials: [],
-    grains: [],
-    edges: [],
-    edgeWeights: [],
-    roundPositions: [],
-    roundNormals: [],
-  };
+  printsOn: (pieceId: string) => readonly SeatPrint[],
+): void {
   for (const part of parts) {
     const material = MATERIALS.indexOf(part.material);
     const weight = SEAMS[part.role] ?? 1;
@@ -134,12 +136,24 @@ export function mergeParts(
     else if (part.solid.shape === 'cylinder') {
       addCylinder(out, part, part.solid.radiusMm, part.solid.heightMm, material);
     } else addPrism(out, part, part.solid, material);
-    for (const value of grainsOf(part, out.positions.slice(start))) out.grains.push(value);
+    addGrains(out, part, start);
   }
+}
+
+/** Merges parts into one list of triangles and one of edges. */
+export function mergeParts(
+  parts: readonly Part[],
+  printsOn: (pieceId: string) => readonly SeatPrint[] = () => [],
+): SolidArrays {
+  const out = eachSolidList((): number[] => []);
+  addParts(out, parts, printsOn);
   return out;
 }
 
 type Numbers = readonly number[] | Float32Array;
+
+const packed = (numbers: Numbers): Float32Array =>
+  numbers instanceof Float32Array ? numbers : new Float32Array(numbers);
 
 /** Triangles as they go to the card; those that have a material and no grain are plain. */
 export function surfaceOf(
@@ -149,11 +163,11 @@ export function surfaceOf(
   grains: Numbers = new Float32Array((materials?.length ?? 0) * 4),
 ): BufferGeometry {
   const geometry = new BufferGeometry();
-  geometry.setAttribute('position', new BufferAttribute(new Float32Array(positions), 3));
-  geometry.setAttribute('normal', new BufferAttribute(new Float32Array(normals), 3));
+  geometry.setAttribute('position', new BufferAttribute(packed(positions), 3));
+  geometry.setAttribute('normal', new BufferAttribute(packed(normals), 3));
   if (materials) {
-    geometry.setAttribute('tone', new BufferAttribute(new Float32Array(materials), 1));
-    geometry.setAttribute('grain', new BufferAttribute(new Float32Array(grains), 4));
+    geometry.setAttribute('tone', new BufferAttribute(packed(materials), 1));
+    geometry.setAttribute('grain', new BufferAttribute(packed(grains), 4));
   }
   return geometry;
 }

@@ -19,13 +19,15 @@ function seedOf(id: string): number {
   return (((hash ^ (hash >>> 12)) >>> 0) % SEEDS) / SEEDS + 1 / SEEDS;
 }
 
+export const hasGrain = (part: Part): part is Part & { grain: NonNullable<Part['grain']> } =>
+  part.grain !== undefined && TIMBERS.has(part.material);
+
 /**
  * Where points of a part lie in their board: along its grain and across it in mm, and the seed of the board; all 0
  * without a grain.
  */
-export function grainsOf(part: Part, positions: readonly number[]): number[] {
-  if (!part.grain || !TIMBERS.has(part.material))
-    return new Array<number>((positions.length / 3) * 4).fill(0);
+export function grainsOf(part: Part, positions: ArrayLike<number>): number[] {
+  if (!hasGrain(part)) return new Array<number>((positions.length / 3) * 4).fill(0);
   const axes = partAxes(part.rotationRad);
   const order = ORDERS[part.grain];
   const seed = seedOf(part.id);

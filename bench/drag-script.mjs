@@ -1,0 +1,82 @@
+// What the page's scripts cost for each frame while the end of a bench is pulled, and while the bench is carried, twelve
+// people at table.
+import { chromium } from 'playwright-core';
+import { dragFrom } from './lib/drag.mjs';
+import { openProduct } from './lib/product.mjs';
+import { roomOfTwelve } from './lib/room-of-twelve.mjs';
+
+const SITTERS = 12;
+/** Bodies come one by one from a worker: nothing of that is to fall into the figures. */
+const SETTLE_MS = 15_000;
+const PAUSE_MS = 3000;
+
+const middleOf = ({ x, y, width, height }) => ({ x: x + width / 2, y: y + height / 2 });
+
+const grip = (page, name) =>
+  page.getByRole('button', { name: new RegExp(`^Bench .*${name}.*arrows change it$`) });
+
+/** Where the selected bench can be taken hold of on the plan: between its ends, and under no button. */
+async function bareSpot(page) {
+  const [left, right] = await Promise.all(
+    ['length, left end', 'length, right end'].map(async (end) =>
+      middleOf(await grip(page, end).boundingBox()),
+    ),
+  );
+  for (let share = 0.1; share < 0.9; share += 0.01) {
+    const [x, y] = [left.x + (right.x - left.x) * share, left.y + (right.y - left.y) * share];
+    const bare = await page.evaluate(
+      ([x, y]) =>
+        !document.elementFromPoint(x, y)?.closest('button') &&
+        !!document.elementFromPoint(x, y)?.closest('[data-scene]'),
+      [x, y],
+    );
+    if (bare) return { x, y };
+  }
+  throw new Error('The bench is covered by buttons.');
+}
+
+export async function run() {
+  const product = await openProduct();
+  const base = `/workshops/${product.workshopId}/productions`;
+  const production = await product.call('POST', base, {
+    name: 'In the hand',
+    summary: '',
+    units: 'feet-inches',
+    roundTo: 8,
+  });
+  const document = roomOfTwelve();
+  const set = await product.call('POST', `${base}/${production.id}/sets`, { name: 'Twelve', document });
+  const browser = await chromium.launch({
+    executablePath: '/usr/bin/chromium',
+    args: [
+      '--no-sandbox',
+      '--enable-unsafe-swiftshader',
+      '--disable-background-networking',
+      '--disable-quic',
+    ],
+  });
+  const page = await browser.newPage({ baseURL: product.address, viewport: { width: 1120, height: 640 } });
+  await page.goto('/sign-in');
+  await page.getByLabel('E-mail').fill(product.email);
+  await page.getByLabel('Password', { exact: true }).fill(product.password);
+  await page.getByRole('button', { name: 'Sign in' }).click();
+  await page.waitForURL(/\/w\//);
+  const bench = document.pieces.find(({ kind }) => kind === 'bench');
+  await page.goto(`/w/${product.workshopId}/p/${production.id}/sets/${set.id}?piece=${bench.id}&view=D`);
+  const scene = page.locator(`[data-scene-sitters="${SITTERS}"][data-scene-calls]`);
+  await scene.waitFor({ state: 'attached', timeout: 60_000 });
+  await page.waitForTimeout(SETTLE_MS);
+  const end = grip(page, 'length, right end');
+  await end.waitFor();
+  const pulled = await dragFrom(page, middleOf(await end.boundingBox()));
+  await page.waitForTimeout(PAUSE_MS);
+  const carried = await dragFrom(page, await bareSpot(page));
+  await browser.close();
+  await product.close();
+  return [
+    { name: 'drag-script', value: pulled.frame, unit: 'ms a frame', aim: 8, reference: null },
+    { name: 'drag-script-first', value: pulled.first, unit: 'ms', aim: null, reference: null },
+    { name: 'drag-script-carry', value: carried.frame, unit: 'ms a frame', aim: 8, reference: null },
+    { name: 'drag-script-carry-first', value: carried.first, unit: 'ms', aim: null, reference: null },
+  ];
+}
