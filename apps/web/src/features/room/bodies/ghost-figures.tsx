@@ -53,11 +53,12 @@ function Shell({ pose, which, colour, palette, shared }: ShellProps) {
     made.setIndex(new BufferAttribute(mesh.indices, 1));
     return made;
   }, [mesh]);
-  const material = useMemo(
-    () =>
-      createGhostMaterial(shared, (palette.sitters[colour - 1] ?? palette.pen).clone(), which, pixelRatio),
-    [shared, palette, colour, which, pixelRatio],
-  );
+  const material = useMemo(() => {
+    const fill = (palette.sitters[colour - 1] ?? palette.pen).clone();
+    // The larger one is seen against the room, the smaller one against the body.
+    const ink = which === 'larger' ? palette.chosen : palette.pen;
+    return createGhostMaterial(shared, fill, ink.clone(), which, pixelRatio);
+  }, [shared, palette, colour, which, pixelRatio]);
   useEffect(() => () => geometry?.dispose(), [geometry]);
   useEffect(() => () => material.dispose(), [material]);
   useEffect(() => invalidate(), [geometry, material, invalidate]);

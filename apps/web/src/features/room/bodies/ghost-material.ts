@@ -20,7 +20,7 @@ const VERTEX = /* glsl */ `
 /** A dashed line where the skin turns away, a breath of colour within it. */
 const FRAGMENT = /* glsl */ `
   uniform vec3 uColour;
-  uniform vec3 uPen;
+  uniform vec3 uInk;
   uniform vec4 uEye;
   uniform float uFill;
   uniform float uDashPx;
@@ -31,24 +31,29 @@ const FRAGMENT = /* glsl */ `
     float facing = abs(dot(normalize(vNormalRoom), normalize(uEye.xyz - vRoom * uEye.w)));
     float line = 1.0 - smoothstep(1.4, 2.6, facing / max(fwidth(facing), 1e-5));
     line *= step(fract((gl_FragCoord.x - gl_FragCoord.y) / uDashPx), 0.6);
-    gl_FragColor = vec4(mix(uColour, uPen, line), max(line, uFill));
+    gl_FragColor = vec4(mix(uColour, uInk, line), max(line, uFill));
   }`;
 
-/** The smaller body lies inside the drawn one: its line is drawn as if it stood this much before it. */
-const NEARER_MM = 160;
-const FILL = 0.16;
+/**
+ * The smaller body lies inside the drawn one: its line is drawn as if it stood this much before it. Of the larger one
+ * only what looks out behind the drawn one is seen.
+ */
+const NEARER_MM = { smaller: 160, larger: -60 };
+const FILL = { smaller: 0, larger: 0.3 };
 const DASH_PX = 8;
 
 /**
  * A thin shell round a body.
  *
  * @param colour - the sitter's
+ * @param ink - of the dashed line
  * @param which - the larger one holds a little colour, the smaller one is a line
  * @param pixelRatio - pixels of the picture for one of the page
  */
 export const createGhostMaterial = (
   shared: SharedUniforms,
   colour: Vector3,
+  ink: Vector3,
   which: 'smaller' | 'larger',
   pixelRatio: number,
 ): ShaderMaterial =>
@@ -58,8 +63,9 @@ export const createGhostMaterial = (
     uniforms: {
       ...shared,
       uColour: { value: colour },
-      uNearerMm: { value: which === 'smaller' ? NEARER_MM : 0 },
-      uFill: { value: which === 'smaller' ? 0 : FILL },
+      uInk: { value: ink },
+      uNearerMm: { value: NEARER_MM[which] },
+      uFill: { value: FILL[which] },
       uDashPx: { value: DASH_PX * pixelRatio },
     },
     transparent: true,

@@ -13,8 +13,6 @@ const RANGES = readJointRanges(jointFile);
 const sayWarning = ({ joint, motion, side, deg, limitDeg, source }: JointWarning): string =>
   `${side ? `${side} ` : ''}${joint} ${motion} ${Math.round(deg)}°, beyond the ${limitDeg}° that most people manage (${source.cite}; ${SOURCE_MARK_WORDS[source.mark]})`;
 
-const FOR_SCALE = `Drawn for scale, not checked. ${children.warning}`;
-
 const asSentence = (words: string): string => `${words.charAt(0).toUpperCase()}${words.slice(1)}.`;
 
 /** How the sitter sits now, and what of it few people could hold. */
@@ -39,7 +37,11 @@ export function SittingWords({ body }: { body: SeatedBody }) {
   const measuredAs = sayMeasuredAs(choice, style);
   return (
     <div>
-      {body.forScale && <p className="mb-1 font-medium">{FOR_SCALE}</p>}
+      {body.forScale && (
+        <p className="mb-1">
+          <strong className="font-semibold">Drawn for scale, not checked.</strong> {children.warning}
+        </p>
+      )}
       <p data-sitting>{asSentence(words.join(', '))}</p>
       {measuredAs !== '' && <p className="mt-1 text-ink-2">{measuredAs}</p>}
       {warnings.map((warning) => (
