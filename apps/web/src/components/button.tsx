@@ -21,14 +21,14 @@ const LOOKS: Record<Look, string> = {
 function classes({ look = 'ruled', size = 'normal' }: Pick<Shared, 'look' | 'size'>, more?: string): string {
   if (look === 'word') {
     return classNames(
-      'link inline-flex min-h-6 items-center gap-1.5 py-0.5 text-sm disabled:text-ink-3',
+      'link reach inline-flex min-h-6 items-center gap-1.5 py-0.5 text-sm disabled:text-ink-3',
       more,
     );
   }
   return classNames(
     'quick inline-flex items-center justify-center gap-2 rounded-sm border-[1.25px] font-medium leading-tight no-underline',
     'aria-disabled:cursor-default aria-disabled:opacity-60 disabled:cursor-not-allowed disabled:opacity-60',
-    size === 'small' ? 'min-h-9 px-3.5 py-1.5 text-sm' : 'min-h-11 px-5 py-2 text-base',
+    size === 'small' ? 'min-h-9 px-3.5 py-1.5 text-sm max-tablet:min-h-10' : 'min-h-11 px-5 py-2 text-base',
     LOOKS[look],
     more,
   );

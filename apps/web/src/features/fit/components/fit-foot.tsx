@@ -50,7 +50,7 @@ export function FitFoot({ isOpen, onToggle, shortcut, line, pageTo }: FitFootPro
           <>
             <div className="min-w-0 flex-1 max-tablet:hidden">{line}</div>
             <p className="text-xs text-ink-2 max-desk:hidden">+ room left, − short, est. 90 in 100</p>
-            <Link className="link text-sm whitespace-nowrap max-tablet:ml-auto" to={pageTo}>
+            <Link className="link reach text-sm whitespace-nowrap max-tablet:ml-auto" to={pageTo}>
               Open as a page
             </Link>
           </>

@@ -153,7 +153,7 @@ export function KeyPlan({ picture, address }: Props) {
             value={letter}
             aria-label={`${letter}, ${VIEW_TITLES[letter].toLowerCase()}`}
             title={VIEW_TITLES[letter]}
-            className="quick absolute flex size-[30px] -translate-1/2 cursor-pointer items-center justify-center rounded-sm data-focus:shadow-(--focus-ring)"
+            className="quick reach absolute flex size-[30px] -translate-1/2 cursor-pointer items-center justify-center rounded-sm data-focus:shadow-(--focus-ring)"
             style={{
               left: `${(eyes[letter].left / WIDTH) * 100}%`,
               top: `${(eyes[letter].top / tall) * 100}%`,

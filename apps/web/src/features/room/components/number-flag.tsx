@@ -149,7 +149,7 @@ export function NumberFlag({ pieceId, parameter, look, slipId, onHand, onNext }:
           onFocus={(event) => setHeld(event.currentTarget.matches(':focus-visible'))}
           onBlur={() => setHeld(false)}
           className={classNames(
-            'quick inline-block rounded-sm border-[1.25px] border-chalk bg-sheet text-center font-semibold text-chalk hover:bg-chalk-wash',
+            'quick reach inline-block rounded-sm border-[1.25px] border-chalk bg-sheet text-center font-semibold text-chalk hover:bg-chalk-wash',
             LOOKS[look],
           )}
         >

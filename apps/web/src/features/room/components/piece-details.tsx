@@ -64,7 +64,7 @@ export function PieceDetails({ piece, document, actions, onChoose, onCopy }: Pro
           <Menu
             name={`More of ${piece.mark}, menu`}
             button="More"
-            buttonClassName="link min-h-6"
+            buttonClassName="link reach min-h-6"
             entries={moreEntries({ piece, document, actions, onChoose, onCopy }, style)}
           />
         )}

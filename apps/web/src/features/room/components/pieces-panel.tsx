@@ -80,7 +80,7 @@ export function PiecesPanel({
             <Menu
               name="Add a piece, menu"
               button="Add"
-              buttonClassName="link text-sm"
+              buttonClassName="link reach text-sm"
               entries={entries}
               side="end"
             />
@@ -105,7 +105,7 @@ export function PiecesPanel({
                 aria-pressed={choosing ? chosen : undefined}
                 data-piece={piece.mark}
                 onClick={(event) => press(piece, event)}
-                className="quick flex min-h-9 w-full items-center gap-3 py-1 text-left hover:bg-sunk"
+                className="quick flex min-h-9 w-full max-tablet:min-h-11 items-center gap-3 py-1 text-left hover:bg-sunk"
               >
                 <MarkTag mark={piece.mark} timber={timberOf(piece.kind)} selected={chosen} />
                 <span

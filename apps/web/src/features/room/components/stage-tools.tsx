@@ -75,7 +75,7 @@ function ZoomButton({ name, onPress, children }: { name: string; onPress: () => 
       type="button"
       aria-label={name}
       onClick={onPress}
-      className="quick min-h-8 min-w-8 rounded-sm px-1.5 font-medium hover:bg-sunk hover:text-ink"
+      className="quick min-h-8 min-w-8 rounded-sm px-1.5 max-tablet:min-h-10 max-tablet:min-w-10 font-medium hover:bg-sunk hover:text-ink"
     >
       {children}
     </button>

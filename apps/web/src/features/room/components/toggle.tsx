@@ -14,7 +14,7 @@ export function Toggle({ on, onChange, children }: Props) {
     <Switch
       checked={on}
       onChange={onChange}
-      className="quick flex min-h-8 items-center gap-1 rounded-sm px-1 font-medium hover:text-ink data-checked:text-ink"
+      className="quick flex min-h-8 items-center max-tablet:min-h-10 gap-1 rounded-sm px-1 font-medium hover:text-ink data-checked:text-ink"
     >
       <span aria-hidden="true" className="flex w-4 justify-center text-chalk">
         {on && <TickIcon />}

@@ -98,7 +98,7 @@ export const HandleGrip = memo(function HandleGrip({ piece, handle, controller, 
           if (!pull.tookPress()) begin();
         }}
         {...pull.handlers}
-        className="quick pointer-events-auto flex size-7 touch-none items-center justify-center rounded-full border-[1.25px] border-chalk bg-sheet text-chalk hover:bg-chalk-wash active:bg-chalk active:text-on-chalk"
+        className="quick reach pointer-events-auto flex size-7 touch-none items-center justify-center rounded-full border-[1.25px] border-chalk bg-sheet text-chalk hover:bg-chalk-wash active:bg-chalk active:text-on-chalk"
       >
         <svg data-arrow width="18" height="18" viewBox="-9 -9 18 18" aria-hidden="true" fill="none">
           <path

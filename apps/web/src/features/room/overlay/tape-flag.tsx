@@ -76,7 +76,7 @@ function PlainFlag({ tape, style, litCellId, onOpenCell }: Props) {
       type="button"
       aria-label={`${sayTape(tape, style, detail)}, open the check`}
       onClick={() => onOpenCell(cellId)}
-      className={classNames('quick block', look)}
+      className={classNames('quick reach block', look)}
     >
       {words}
     </button>
@@ -133,7 +133,7 @@ function EditableFlag({
             edit.keys(event);
           }
         }}
-        className={classNames('quick block bg-sheet', FLAG, REST.chalk)}
+        className={classNames('quick reach block bg-sheet', FLAG, REST.chalk)}
       >
         {tape.name}{' '}
         <strong className="font-semibold">

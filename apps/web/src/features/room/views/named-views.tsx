@@ -60,7 +60,7 @@ function Row({ view, picture, address, actions }: RowProps) {
         aria-current={seen ? 'true' : undefined}
         onClick={() => address.showNamed({ id: view.id, clientView: view.shown.clientView })}
         className={classNames(
-          'quick flex min-h-8 w-full items-baseline justify-between gap-3 rounded-sm px-1 text-left hover:bg-sunk',
+          'quick flex min-h-8 w-full items-baseline max-tablet:min-h-10 justify-between gap-3 rounded-sm px-1 text-left hover:bg-sunk',
           seen && 'font-medium text-chalk',
         )}
       >
