@@ -22,6 +22,11 @@ function address(path: string, query: RequestOptions['query']): string {
   return `${window.location.origin}/api${path}${text === '' ? '' : `?${text}`}`;
 }
 
+function bodyOf(body: unknown): BodyInit | undefined {
+  if (body === undefined || body instanceof FormData) return body;
+  return JSON.stringify(body);
+}
+
 async function send(
   method: Method,
   path: string,
@@ -29,14 +34,16 @@ async function send(
   token: string | null,
 ): Promise<Response> {
   const headers = new Headers({ Accept: 'application/json' });
-  if (options.body !== undefined) headers.set('Content-Type', 'application/json');
+  // Of a form the browser writes the type itself, with the line between its parts.
+  if (options.body !== undefined && !(options.body instanceof FormData))
+    headers.set('Content-Type', 'application/json');
   if (token !== null) headers.set('Authorization', `Bearer ${token}`);
   try {
     const response = await fetch(address(path, options.query), {
       method,
       headers,
       credentials: 'same-origin',
-      body: options.body === undefined ? undefined : JSON.stringify(options.body),
+      body: bodyOf(options.body),
       signal: options.signal,
     });
     // A gateway that answers for a server which is down says nothing about what was typed.

@@ -64,3 +64,6 @@ export type SurveyUse = Schema['PopulationUseDto'];
 
 export type OrderState = Schema['OrderState'];
 export type OrderSummary = Schema['OrderSummaryDto'];
+
+/** What passed between the two sides of an order. */
+export type OrderLife = Schema['OrderLifeDto'];

@@ -15,9 +15,9 @@ export const orderAddress = ({ workshopId, productionId, orderId }: OrderPath) =
   `${productionPath(workshopId, productionId)}/orders/${orderId}`;
 
 /** Mail goes out and answers come in while the page stands open, so it is read again in time. */
-const FOLLOWED = { refetchInterval: 30_000, refetchOnWindowFocus: 'always' } as const;
+export const FOLLOWED = { refetchInterval: 30_000, refetchOnWindowFocus: 'always' } as const;
 
-const orderKey = ({ workshopId, productionId, orderId }: OrderPath) =>
+export const orderKey = ({ workshopId, productionId, orderId }: OrderPath) =>
   [...productionKey(workshopId, productionId), 'orders', orderId] as const;
 
 export const useOrder = (path: OrderPath) =>
@@ -127,7 +127,7 @@ export function useAddUpholsterer(workshopId: string) {
 
 /** Where the order behind a private link is kept. */
 export const publicKey = (token: string) => ['order-link', token] as const;
-const publicAddress = (token: string) => `/link/${encodeURIComponent(token)}`;
+export const publicAddress = (token: string) => `/link/${encodeURIComponent(token)}`;
 
 export const usePublicOrder = (token: string) =>
   useQuery({

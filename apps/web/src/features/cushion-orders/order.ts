@@ -48,6 +48,17 @@ export const EVENT_WORDS: Partial<Record<string, string>> = {
   acknowledged: 'Can make it as drawn',
   'link-renewed': 'A new private link was mailed',
   'link-revoked': 'The private link was revoked',
+  'quote-given': 'Quoted',
+  'quote-accepted': 'The quote was accepted',
+  'quote-declined': 'The quote was declined',
+  'first-article-accepted': 'The first article was accepted',
+  'first-article-rejected': 'The first article was rejected',
+  'delivery-accepted': 'The delivery was accepted',
+  'delivery-rejected': 'The delivery was rejected',
+  'deposit-paid': 'A deposit was paid',
+  'deposit-recorded': 'A deposit was put down',
+  'refund-recorded': 'A refund was put down',
+  'mail-bounced': 'A mail came back',
 };
 
 export interface OrderMessage {

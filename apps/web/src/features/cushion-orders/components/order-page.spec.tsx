@@ -5,7 +5,7 @@ import { beforeEach, describe, expect, it } from 'vitest';
 import { PRODUCTION_ID, renderPage, signInAs, WORKSHOP_ID } from '@/test/render-page.tsx';
 import { server } from '@/test/server.ts';
 import type { Order } from '../order.ts';
-import { ORDER, SENT_ORDER } from '../test/orders.ts';
+import { LIFE, ORDER, SENT_ORDER } from '../test/orders.ts';
 import { OrderPage } from './order-page.tsx';
 
 const AT = '*/api/workshops/:workshopId/productions/:productionId/orders/:orderId';
@@ -17,6 +17,7 @@ function show(order: Order) {
   server.use(
     http.get(AT, () => HttpResponse.json(order)),
     http.get(`${AT}/messages`, () => HttpResponse.json(page([]))),
+    http.get(`${AT}/life`, () => HttpResponse.json(LIFE)),
     http.get(BOOK, () => HttpResponse.json(page([FENNIMORE]))),
   );
   const path = { workshopId: WORKSHOP_ID, productionId: PRODUCTION_ID, orderId: order.id };

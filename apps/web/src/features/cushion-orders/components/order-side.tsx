@@ -8,6 +8,7 @@ import { sayProblem } from '@/lib/problem.ts';
 import { useWorkshop } from '@/lib/workshop.ts';
 import { useLinkStep, useMailAgain, useMessages, useWriteMessage, type OrderPath } from '../api.ts';
 import { EVENT_WORDS, type Order } from '../order.ts';
+import { ShopLife } from '../life/shop-life.tsx';
 import { Thread } from './thread.tsx';
 import { WriteBox } from './write-box.tsx';
 
@@ -29,6 +30,7 @@ const MAIL_WORDS: Partial<Record<string, string>> = {
   sending: 'The mail is going out.',
   failed: 'The mail could not be sent.',
   'perhaps-sent': 'The mail was perhaps sent: the server stopped while handing it over.',
+  bounced: 'The mail came back. Put the address right and mail a new link.',
 };
 
 function mailWords({ state, at }: NonNullable<Order['lastMail']>): string {
@@ -113,6 +115,11 @@ export function OrderSide({ path, order }: { path: OrderPath; order: Order }) {
         </Notice>
       )}
       {canEdit && sent && <LinkAndMail path={path} order={order} />}
+      {canEdit && sent && (
+        <div className="pt-4">
+          <ShopLife path={path} order={order} />
+        </div>
+      )}
       {canEdit && messages.isPending && sent && <PaleBars words="Loading messages" rows={2} />}
       {messages.isError && <Notice tone="wont">{sayProblem(messages.error)}</Notice>}
       {messages.data && <Thread messages={messages.data.items} own="workshop" />}

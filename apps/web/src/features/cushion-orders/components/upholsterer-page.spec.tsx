@@ -1,15 +1,17 @@
 import { screen, waitFor, within } from '@testing-library/react';
 import userEvent from '@testing-library/user-event';
 import { http, HttpResponse } from 'msw';
-import { describe, expect, it } from 'vitest';
+import { beforeEach, describe, expect, it } from 'vitest';
 import { renderPage } from '@/test/render-page.tsx';
 import { server } from '@/test/server.ts';
-import { PUBLIC_ORDER } from '../test/orders.ts';
+import { LIFE, PUBLIC_ORDER } from '../test/orders.ts';
 import { UpholstererPage } from './upholsterer-page.tsx';
 
 const LINK = '*/api/link/:token';
 const refusal = (status: number, code: string, detail: string) =>
   HttpResponse.json({ code, title: detail, detail, status }, { status });
+
+beforeEach(() => server.use(http.get(`${LINK}/life`, () => HttpResponse.json(LIFE))));
 
 const show = () => renderPage(<UpholstererPage token="secret-token" />);
 const say = () => screen.findByRole('button', { name: 'I can make this as drawn' });

@@ -1,10 +1,21 @@
 import { useEffect, type ReactNode } from 'react';
 import { LoadingLine } from '@/components/loading.tsx';
+import { Notice } from '@/components/notice.tsx';
 import { RuleHeading } from '@/components/rule-heading.tsx';
+import type { OrderLife } from '@/lib/contract.ts';
 import { dayWords } from '@/lib/dates.ts';
 import { usePageTitle } from '@/lib/page-title.ts';
+import { sayProblem } from '@/lib/problem.ts';
 import { setProductionUnits } from '@/lib/unit-choice.ts';
 import { usePublicOrder, useReply } from '../api.ts';
+import { Changes } from '../life/changes.tsx';
+import { Deposits } from '../life/deposits.tsx';
+import { type Desk, useLife } from '../life/desk.ts';
+import { Files } from '../life/files.tsx';
+import { GiveQuote } from '../life/give-quote.tsx';
+import { Inspections } from '../life/inspections.tsx';
+import { MarkState } from '../life/mark-state.tsx';
+import { Questions } from '../life/questions.tsx';
 import type { PublicOrder } from '../order.ts';
 import { Acknowledge } from './acknowledge.tsx';
 import { ClosedLink } from './closed-link.tsx';
@@ -23,6 +34,8 @@ function Fact({ name, children }: { name: string; children: ReactNode }) {
 
 function Opened({ token, order }: { token: string; order: PublicOrder }) {
   const reply = useReply(token);
+  const desk: Desk = { side: 'upholsterer', token };
+  const life = useLife(desk);
   usePageTitle(order.title);
   useEffect(() => {
     setProductionUnits({ system: order.units, roundTo: order.roundTo });
@@ -49,6 +62,7 @@ function Opened({ token, order }: { token: string; order: PublicOrder }) {
             {order.productionName}, {order.setName}
           </Fact>
         </dl>
+        {life.data && <Changes life={life.data} revisionLetter={order.revisionLetter} />}
         <CushionGroups cushions={order.cushions} words={order.spec} />
         {order.spec.notes !== '' && <p className="mb-3 max-w-text whitespace-pre-line">{order.spec.notes}</p>}
         {order.spec.flammability !== '' && (
@@ -74,13 +88,39 @@ function Opened({ token, order }: { token: string; order: PublicOrder }) {
           busy={reply.isPending}
           send={(text) => reply.mutateAsync(text)}
         />
-        <div className="mt-8">
+        <div className="my-8">
           <RuleHeading>Can it be made?</RuleHeading>
           <Acknowledge token={token} order={order} />
         </div>
+        {life.isError && !life.data && <Notice tone="wont">{sayProblem(life.error)}</Notice>}
+        {life.data && <LinkLife desk={desk} order={order} life={life.data} marks={marks} />}
         <p className="mt-6 text-sm text-ink-2">This link works until {dayWords(order.linkExpiresAt)}.</p>
       </aside>
     </div>
+  );
+}
+
+interface LinkLifeProps {
+  desk: Desk;
+  order: PublicOrder;
+  life: OrderLife;
+  marks: readonly string[];
+}
+
+/** The upholsterer's side of what passes between the two. */
+function LinkLife({ desk, order, life, marks }: LinkLifeProps) {
+  const keptAs = `link.${order.workshop.name}.${order.number}`;
+  const open = order.state !== 'closed' && order.state !== 'cancelled';
+  const name = `${keptAs}.name`;
+  return (
+    <>
+      <MarkState desk={desk} life={life} nameKeptAs={name} />
+      <GiveQuote desk={desk} life={life} order={order} nameKeptAs={name} />
+      <Deposits desk={desk} life={life} />
+      <Inspections desk={desk} inspections={life.inspections} files={life.files} />
+      <Questions {...{ desk, marks, keptAs, open }} questions={life.questions} />
+      <Files desk={desk} files={life.files} marks={marks} open={open} />
+    </>
   );
 }
 

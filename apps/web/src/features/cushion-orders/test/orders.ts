@@ -1,4 +1,5 @@
 import { addPiece, deriveCushions, emptySetDocument } from '@settlewright/geometry';
+import type { OrderLife } from '@/lib/contract.ts';
 import type { Order, PublicOrder } from '../order.ts';
 
 export const CUSHIONS = deriveCushions(addPiece(emptySetDocument(), 'bench').document);
@@ -62,4 +63,44 @@ export const SENT_ORDER: Order = {
   link: { state: 'valid', expiresAt: '2026-04-01T10:00:00Z' },
   lastMail: { id: 'm1', state: 'failed', at: '2026-01-29T09:00:00Z' },
   nextStates: ['quoted', 'cancelled'],
+};
+
+export const LIFE: OrderLife = {
+  toleranceMm: 6.35,
+  earlierRevision: null,
+  changes: [],
+  agreement: { upholsterer: null, workshop: null },
+  firstArticle: 'none',
+  delivery: 'none',
+  upholstererMayMark: [],
+  upholstererMayQuote: true,
+  quotes: [],
+  questions: [],
+  inspections: [],
+  files: [],
+  payments: [],
+  depositOnline: false,
+  mails: [],
+};
+
+export const QUOTE: OrderLife['quotes'][number] = {
+  id: 'q1',
+  side: 'upholsterer',
+  byName: 'Odile Fennimore',
+  at: '2026-02-02T09:00:00Z',
+  current: true,
+  revisionLetter: 'B',
+  lines: [{ text: 'Seat cushion', quantity: 4, unitMinor: 46_500 }],
+  currency: 'USD',
+  taxText: '',
+  taxMinor: 0,
+  totalMinor: 186_000,
+  validUntil: '2099-02-19',
+  deliveryOn: null,
+  note: '',
+  state: 'offered',
+  inForce: true,
+  answeredAt: null,
+  answeredByName: '',
+  answer: '',
 };
