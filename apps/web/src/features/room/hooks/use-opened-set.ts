@@ -33,6 +33,9 @@ export function useOpenedSet(path: SetPath, userId: string, canEdit: boolean): O
       }
       const opening = openSet(data, unsent);
       if (opening.kind === 'unreachable') return;
+      // What the server has is not unsent any more.
+      if (opening.kind === 'fresh' && unsent) await outbox.clear();
+      if (left) return;
       const store = createRoomStore(opening.document);
       autosave = createAutosave({
         store,

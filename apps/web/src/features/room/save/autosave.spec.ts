@@ -168,6 +168,20 @@ describe('opening a set again', () => {
     });
   });
 
+  it('takes a newer draft that holds the unsent work for its own', () => {
+    const own = { ...draft, document: set('unsent') };
+    expect(openSet(own, unsent(40))).toMatchObject({ kind: 'fresh', base: { number: 41 } });
+  });
+
+  it('goes on with unsent work where the newer draft changed nothing', () => {
+    const same = { ...draft, document: set('began from') };
+    expect(openSet(same, unsent(40))).toMatchObject({
+      kind: 'resumed',
+      document: set('unsent'),
+      base: { number: 41 },
+    });
+  });
+
   it('opens unsent work without the server, and says so when there is none', () => {
     expect(openSet(undefined, unsent(40))).toMatchObject({ kind: 'resumed', document: set('unsent') });
     expect(openSet(undefined, undefined)).toEqual({ kind: 'unreachable' });

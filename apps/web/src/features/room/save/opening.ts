@@ -1,4 +1,4 @@
-import type { SetDocument } from '@settlewright/geometry';
+import { diffDocuments, type SetDocument } from '@settlewright/geometry';
 import type { Draft } from '@/lib/contract.ts';
 import type { DraftConflict } from './autosave.ts';
 import type { Unsent } from './outbox.ts';
@@ -25,6 +25,14 @@ export function openSet(draft: Draft | undefined, unsent: Unsent | undefined): O
   }
   if (!unsent) return { kind: 'fresh', document: draft.document, base: draft, savedAt: draft.savedAt };
   if (unsent.base.number === draft.number) {
+    return { kind: 'resumed', document: unsent.document, base: draft, savedAt: draft.savedAt };
+  }
+  // The newer draft may be this very work, saved while the page was left: then nobody changed anything else.
+  const differences = diffDocuments(unsent.base.document, unsent.document, draft.document);
+  if (differences.length === 0) {
+    return { kind: 'fresh', document: draft.document, base: draft, savedAt: draft.savedAt };
+  }
+  if (differences.every(({ changedBy }) => changedBy === 'mine')) {
     return { kind: 'resumed', document: unsent.document, base: draft, savedAt: draft.savedAt };
   }
   return {
