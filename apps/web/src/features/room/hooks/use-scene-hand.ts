@@ -16,7 +16,7 @@ import { bodyUnder } from '../posture/pick-body.ts';
 import { firstUnder, onLevel, pieceUnder } from '../scene/pick.ts';
 import { turn } from '../scene/vectors.ts';
 import { pixelsPerMm, rayThrough } from '../scene/view-frame.ts';
-import type { SceneView } from '../scene/views.ts';
+import { isBodyLeft, type SceneView } from '../scene/views.ts';
 import { visibleParts } from '../scene/visible-parts.ts';
 import { useRoomStore } from '../store.ts';
 import { adds, type Choosing } from './use-choosing.ts';
@@ -102,7 +102,7 @@ export function useSceneHand(options: {
     const ray = rayAt(x, y);
     if (!ray) return;
     const parts = visibleParts(picture.document, picture.parts, letter);
-    const pieceId = pieceUnder(parts, ray);
+    const pieceId = pieceUnder(parts, ray, view.cut);
     const piece = picture.document.pieces.find((candidate) => candidate.id === pieceId);
     const adding = choosing !== undefined && (choosing.several || adds(event));
     const group = choosing && choosing.pieces.length > 1 ? choosing.pieces : [];
@@ -219,8 +219,13 @@ export function useSceneHand(options: {
   function chooseBody({ startX, startY, adding, onGroup }: Drag): boolean {
     const ray = rayAt(startX, startY);
     if (!ray || !showBodies || adding || onGroup) return false;
-    const before = firstUnder(visibleParts(picture.document, picture.parts, letter), ray)?.distanceMm;
-    const body = bodyUnder(picture.bodies, ray, before);
+    const before = firstUnder(
+      visibleParts(picture.document, picture.parts, letter),
+      ray,
+      view.cut,
+    )?.distanceMm;
+    const left = picture.bodies.filter(({ crownMm }) => isBodyLeft(crownMm, view.cut));
+    const body = bodyUnder(left, ray, before);
     if (!body) return false;
     choosePlace(body.placeId);
     onSelect(body.pieceId);
