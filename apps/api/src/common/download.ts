@@ -2,6 +2,7 @@ import { StreamableFile } from '@nestjs/common';
 
 const TYPES = {
   csv: 'text/csv; charset=utf-8',
+  dxf: 'image/vnd.dxf',
   json: 'application/json; charset=utf-8',
   pdf: 'application/pdf',
 };

@@ -2,6 +2,7 @@ import { Module } from '@nestjs/common';
 import { TypeOrmModule } from '@nestjs/typeorm';
 import { ObjectStoreModule } from '../object-store/object-store.module';
 import { PaymentsModule } from '../payments/payments.module';
+import { SpecPress } from '../paper/spec-press';
 import { ProductionsModule } from '../productions/productions.module';
 import { SetsModule } from '../sets/sets.module';
 import { UpholsterersModule } from '../upholsterers/upholsterers.module';
@@ -27,6 +28,7 @@ import { LinkService } from './link.service';
 import { OrderActs } from './order-acts.service';
 import { OrderCorrespondence } from './order-correspondence.service';
 import { OrderLetters } from './order-letters.service';
+import { LinkListsController, OrderListsController } from './order-lists.controller';
 import { OrderMarks } from './order-marks.service';
 import { OrderPaper } from './order-paper.service';
 import { OrderProgress } from './order-progress.service';
@@ -52,11 +54,13 @@ import { SentCushions } from './sent-cushions.service';
   controllers: [
     OrdersController,
     OrderLifeController,
+    OrderListsController,
     DepositsController,
     PaymentNewsController,
     FilesController,
     LinkController,
     LinkLifeController,
+    LinkListsController,
     LinkFilesController,
   ],
   providers: [
@@ -66,6 +70,7 @@ import { SentCushions } from './sent-cushions.service';
     OrderProgress,
     OrderViews,
     OrderPaper,
+    SpecPress,
     LinkService,
     OrderTexts,
     HeldPapers,

@@ -1,28 +1,39 @@
-import { planOf } from '@settlewright/geometry';
+import { type OrderCover, orderModel, pictureFromAbove, plainCover, planOf } from '@settlewright/geometry';
 import { Injectable } from '@nestjs/common';
-import { specPdf } from '../paper/spec-pdf';
+import { InjectSettings, type Settings } from '../config/settings';
+import type { SpecPackData } from '../paper/spec-pack';
+import { SpecPress } from '../paper/spec-press';
 import { ProductionsService } from '../productions/productions.service';
 import { WorkshopsService } from '../workshops/workshops.service';
 import { dayInWords, momentInWords } from './day-in-words';
 import type { CushionOrder } from './entities/cushion-order.entity';
 import { IssuedSets } from './issued-sets.service';
 import { markedSections } from './marked-sections';
-import type { OrderContent } from './order-content';
-import { specCushions } from './spec-cushions';
+import { type OrderContent, toleranceOf } from './order-content';
+import { bagLabels, specCushions } from './spec-cushions';
 
 /** Room for a mark that moves off its cushion. */
 const PLAN_MARGIN_MM = 60;
+/** A cover is named by the first words of what was written of it. */
+const NAME_LETTERS = 60;
 
-/** The drawing pack of an order, made anew each time from the revision it cites. */
+/** The paper of an order, made anew each time from the revision it cites. */
 @Injectable()
 export class OrderPaper {
   constructor(
     private readonly issued: IssuedSets,
     private readonly productions: ProductionsService,
     private readonly workshops: WorkshopsService,
+    private readonly press: SpecPress,
+    @InjectSettings() private readonly config: Settings,
   ) {}
 
   async pack(order: CushionOrder, content: OrderContent): Promise<Buffer> {
+    return this.press.draw(await this.data(order, content));
+  }
+
+  /** All that paper, list and cutting file show of an order. */
+  async data(order: CushionOrder, content: OrderContent): Promise<SpecPackData> {
     const { workshopId, productionId, setId } = order;
     const member = { workshopId, userId: order.createdById, role: 'designer' as const };
     const [issued, production, workshop] = await Promise.all([
@@ -31,7 +42,10 @@ export class OrderPaper {
       this.workshops.get(workshopId),
     ]);
     const cushions = this.issued.select(issued, content.cushionMarks);
-    return specPdf({
+    const covers = assumedCovers(content);
+    const assumedCloths = covers.map(({ name }) => name);
+    const model = orderModel({ cushions, covers, rules: issued.cushionRules });
+    return {
       paper: workshop.paper,
       units: { system: production.units, roundTo: production.roundTo },
       production: production.name,
@@ -42,6 +56,7 @@ export class OrderPaper {
         title: content.title,
         neededBy: content.neededBy === null ? null : dayInWords(content.neededBy),
         upholsterer: order.upholsterer?.name ?? null,
+        pageUrl: `${this.config.publicUrl}/w/${workshopId}/p/${productionId}/orders/${order.id}`,
       },
       revision: {
         letter: issued.letter,
@@ -51,9 +66,20 @@ export class OrderPaper {
         note: issued.note,
       },
       words: content.spec,
-      cushions: specCushions(cushions),
+      toleranceMm: toleranceOf(content),
+      model,
+      assumedCloths,
+      cushions: specCushions(model, assumedCloths),
+      labels: bagLabels(cushions),
       plan: planOf(issued.document, { marks: 'cushions', marginMm: PLAN_MARGIN_MM }),
+      picture: pictureFromAbove(issued.document, new Set(cushions.map(({ benchId }) => benchId))),
       sections: markedSections(issued.document, cushions),
-    });
+    };
   }
+}
+
+/** Until a cloth is described: a plain one of the usual width, so that there is a length to talk about. */
+function assumedCovers({ spec }: OrderContent): OrderCover[] {
+  const name = spec.cover.trim().replace(/\s+/g, ' ').slice(0, NAME_LETTERS);
+  return [plainCover(name || 'cover')];
 }

@@ -1,5 +1,11 @@
 import { describe, expect, it } from '@jest/globals';
-import { ARRANGEMENTS, type CushionSpec, deriveCushions, type SetDocument } from '@settlewright/geometry';
+import {
+  ARRANGEMENTS,
+  type CushionSpec,
+  deriveCushions,
+  orderModel,
+  type SetDocument,
+} from '@settlewright/geometry';
 import { markedSections } from './marked-sections';
 import { specCushions } from './spec-cushions';
 
@@ -14,6 +20,8 @@ function arrangement(id: string): SetDocument {
   }
   return document;
 }
+
+const sheetsOf = (cushions: readonly CushionSpec[]) => specCushions(orderModel({ cushions, covers: [] }));
 
 const seatOf = (specs: readonly CushionSpec[], hand: 'left' | 'right') => {
   const found = specs.find((spec) => spec.kind === 'seat' && spec.hand === hand);
@@ -32,15 +40,15 @@ describe('cushions on the sheets', () => {
     ] as const) {
       const spec = seatOf(specs, hand);
       expect(spec.edges[hand]).toBe('wall');
-      const shown = specCushions([spec])[0]!;
+      const shown = sheetsOf([spec])[0]!;
       expect(shown.hand).toBe(hand);
-      expect(shown.buttons.datum).toMatchObject({ side, drawn: true, name: 'wall' });
+      expect(shown.buttons.datum).toMatchObject({ side, drawn: true, name: 'wall W1' });
       expect(shown.edges[side]).toBe(`wall, sitter’s ${hand}`);
     }
   });
 
   it('measure buttons from their own seam and from the wall, apart by the gap', () => {
-    const shown = specCushions([seatOf(specs, 'left')])[0]!;
+    const shown = sheetsOf([seatOf(specs, 'left')])[0]!;
     const { columnsMm, datum } = shown.buttons;
     expect(columnsMm.length).toBeGreaterThan(1);
     columnsMm.forEach((column, i) => expect(datum.columnsMm[i]! - column).toBeCloseTo(datum.toSeamMm, 6));
@@ -50,7 +58,7 @@ describe('cushions on the sheets', () => {
     const left = seatOf(specs, 'left');
     const twin: CushionSpec = { ...left, mark: 'C91', key: 'twin', benchId: 'b91', benchMark: 'B91' };
     const other: CushionSpec = { ...twin, mark: 'C92', edges: { ...twin.edges, right: 'neighbour' } };
-    const shown = specCushions([left, twin, other, seatOf(specs, 'right')]);
+    const shown = sheetsOf([left, twin, other, seatOf(specs, 'right')]);
     expect(shown.map(({ marks }) => marks)).toEqual([
       [left.mark, 'C91'],
       ['C92'],

@@ -1,15 +1,17 @@
 import {
   CLOSURE_WORDS,
   type CushionDatum,
+  type CushionEdge,
   type CushionSpec,
   type EdgeMeets,
-  foamOfCushion,
-  groupCushions,
   makeWords,
+  type OrderModel,
   outlineExtent,
   outlinePerimeter,
+  type ScheduleRow,
 } from '@settlewright/geometry';
-import type { DatumLine, SpecCushion } from '../paper/spec-pack';
+import type { BagLabel, DatumLine, SpecCushion } from '../paper/spec-pack';
+import { clothWay } from './cloth-way';
 
 const MEETS: Record<EdgeMeets, string> = {
   wall: 'wall',
@@ -28,37 +30,41 @@ const MEETS: Record<EdgeMeets, string> = {
 const DRAWN_WITHIN_MM = 100;
 
 /** Cushions as the sheets show them: those that come out of the same drawing stand together. */
-export function specCushions(specs: readonly CushionSpec[]): SpecCushion[] {
-  const byMark = new Map(specs.map((spec) => [spec.mark, spec]));
-  return groupCushions(specs).map(({ marks, spec, mirroredMarks }) => {
-    const benches = marks.map((mark) => byMark.get(mark)?.benchMark ?? '');
-    return specCushion(spec, { marks, benches, mirrorMarks: mirroredMarks });
-  });
+export function specCushions(model: OrderModel, assumedCloths: readonly string[] = []): SpecCushion[] {
+  return model.schedule.map((row) => specCushion(row, model, assumedCloths));
 }
 
-function specCushion(
-  spec: CushionSpec,
-  alike: Pick<SpecCushion, 'marks' | 'benches' | 'mirrorMarks'>,
-): SpecCushion {
+/** A label for the bag of every cushion, in the order of their marks. */
+export function bagLabels(specs: readonly CushionSpec[]): BagLabel[] {
+  return specs.map(({ mark, benchMark, kind, place, hand }, n) => ({
+    mark,
+    place: `${benchMark}, ${kind}${place.of > 1 ? ` ${place.number} of ${place.of} from the left, seen from in front` : ''}`,
+    hand:
+      hand === 'either' ? 'fits either hand' : `${hand === 'left' ? 'LH, left' : 'RH, right'} hand as sat in`,
+    number: n + 1,
+    count: specs.length,
+  }));
+}
+
+function specCushion(row: ScheduleRow, model: OrderModel, assumedCloths: readonly string[]): SpecCushion {
+  const { spec, marks, benchMarks: benches, mirroredMarks: mirrorMarks } = row;
   const { making, make, buttons } = spec;
-  const foam = foamOfCushion(spec);
-  const sawn = making ? outlineExtent(making.foam.outline) : spec.finishedMm;
   const board = making?.board && outlineExtent(making.board.outline);
   return {
-    ...alike,
+    row,
+    marks,
+    benches,
+    mirrorMarks,
     kind: spec.kind,
     hand: spec.hand,
     finished: spec.finishedMm,
     make: makeWords(make, spec.kind),
-    foam: { ...sawn, thicknessMm: making?.foam.thicknessMm ?? spec.finishedMm.thicknessMm },
+    foam: row.sawnMm ?? spec.finishedMm,
     foamGrade: { ...spec.foam, name: spec.foam.grade },
-    foamVolumeM3: foam?.volumeM3 ?? 0,
-    foamMassKg: foam?.massKg ?? 0,
+    foamVolumeM3: row.foam?.volumeM3 ?? 0,
+    foamMassKg: row.foam?.massKg ?? 0,
     ...(spec.curve && { curve: spec.curve }),
-    panels: (making?.panels ?? []).map(({ name, count, cut }) => {
-      const { widthMm, depthMm } = outlineExtent(cut);
-      return { name, count, widthMm, heightMm: depthMm };
-    }),
+    panels: row.panels,
     ...(board && { board }),
     closure: {
       word: CLOSURE_WORDS[make.closure],
@@ -78,13 +84,14 @@ function specCushion(
     },
     edges: edgeWords(spec),
     meets: meetsWords(spec),
+    cloth: clothWay(row, model, assumedCloths),
   };
 }
 
 /** Everything that shows on a sheet, to a tenth of a millimetre. */
 function datumLine({ datum, buttons }: CushionSpec): DatumLine {
   return {
-    name: datum.meets === 'bench-end' ? 'bench end' : MEETS[datum.meets],
+    name: datumName(datum),
     // Drawn with its back edge up, a cushion has the sitter's left at the right of the page.
     side: datum.side === 'left' ? 'right' : 'left',
     toSeamMm: datum.toSeamMm,
@@ -93,17 +100,24 @@ function datumLine({ datum, buttons }: CushionSpec): DatumLine {
   };
 }
 
+/** "wall W1", "end wall", "bench end". */
+function datumName({ meets, wallMark }: CushionDatum): string {
+  if (meets === 'bench-end') return 'bench end';
+  return wallMark ? `${MEETS[meets]} ${wallMark}` : MEETS[meets];
+}
+
 function seamName({ meets, side }: CushionDatum): string {
   if (meets === 'bench-end') return `sitter’s ${side}`;
   return meets === 'end-wall' ? 'end-wall' : `${meets}-end`;
 }
 
-function edgeWords({ kind, edges }: CushionSpec): SpecCushion['edges'] {
+function edgeWords({ kind, edges, cameraSides }: CushionSpec): SpecCushion['edges'] {
+  const camera = (edge: CushionEdge) => (cameraSides.includes(edge) ? ', camera side' : '');
   return {
-    back: kind === 'seat' ? 'back edge' : 'top edge',
-    front: kind === 'seat' ? 'front edge' : 'bottom edge',
-    left: `${endWords(edges.right)}, sitter’s right`,
-    right: `${endWords(edges.left)}, sitter’s left`,
+    back: `${kind === 'seat' ? 'back edge' : 'top edge'}${camera('back')}`,
+    front: `${kind === 'seat' ? 'front edge' : 'bottom edge'}${camera('front')}`,
+    left: `${endWords(edges.right)}, sitter’s right${camera('right')}`,
+    right: `${endWords(edges.left)}, sitter’s left${camera('left')}`,
   };
 }
 

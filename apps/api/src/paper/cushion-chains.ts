@@ -1,59 +1,136 @@
-import { type Chain, chainDepth, drawChain } from './dimension-chain';
-import { chainSide, type CushionPlan, PLAN_SPACE, type PlanPlace } from './plan-place';
+import { type Chain, chainDepth, chainWidth, drawChain } from './dimension-chain';
+import { outlineStops } from './outline-stops';
+import { chainSide, type CushionPlan, planBox, type PlanPlace } from './plan-place';
 import { PEN, type Sheet } from './sheet';
 
-const FIRST_CHAIN_MM = 4.6;
+const FIRST_LEVEL_MM = 4.6;
+const FOOT_MM = 6;
+const FIRST_UPRIGHT_MM = 6.2;
+const BETWEEN_MM = 2.2;
 const WALL_CHAIN_MM = 6.6;
+/** Paper for a wall and its name. */
+const WALL_MM = 17;
 
-/** Paper that the chains above the cushion need. */
-export function spaceAbove(sheet: Sheet, plan: CushionPlan, place: PlanPlace): number {
-  if (plan.columnsMm.length === 0) return 4;
-  return FIRST_CHAIN_MM + chainDepth(sheet, columnChain(plan, place)) + (plan.wall ? WALL_CHAIN_MM + 3 : 1);
+type Unplaced = Omit<Chain, 'at'>;
+
+/** Every chain round a cushion where it stands on the paper. */
+export interface PlanChains {
+  above: Chain[];
+  below: Chain[];
+  upright: Chain[];
+  /** Paper that chains, wall and words need on each side of the outline. */
+  space: { above: number; below: number; left: number; right: number };
 }
 
-const bareOf = (format: PlanPlace['format']) => (mm: number) => format(mm).replace(/[″\s]|mm/g, '');
+/** What lies between neighbouring stops, as whole steps. */
+export function spaces(stops: readonly number[], stepMm: number): number[] {
+  const rounded = stops.map((stop) => Math.round(stop / stepMm) * stepMm);
+  return rounded.slice(1).map((stop, index) => stop - (rounded[index] ?? 0));
+}
 
-function columnChain(plan: CushionPlan, { x, y, factor, format, stepMm }: PlanPlace): Chain {
-  const fromLeft =
-    plan.datum === 'left' ? plan.columnsMm : [...plan.columnsMm].map((c) => plan.widthMm - c).reverse();
-  const stops = [0, ...fromLeft, plan.widthMm];
+/** Lays the chains out from the outline outwards: its corners, then its buttons, then the whole. */
+export function planChains(sheet: Sheet, plan: CushionPlan, place: PlanPlace): PlanChains {
+  const { x, y, factor, format } = place;
+  const box = planBox(plan);
+  const bare = bareOf(format);
+  const level = (mm: number) => x + (mm - box.x0) * factor;
+  const down = (mm: number) => y + (box.y1 - mm) * factor;
+  const chain = (
+    stops: readonly number[],
+    on: (mm: number) => number,
+    rest: Pick<Chain, 'direction' | 'outwards'> & { quiet?: boolean },
+  ): Unplaced => ({
+    stops: stops.map(on),
+    labels: spaces(
+      stops.map((stop) => Math.abs(stop - (stops[0] ?? 0))),
+      place.stepMm,
+    ).map(bare),
+    ...rest,
+  });
+  const corners = outlineStops(plan.outline);
+  const columns = columnStops(plan);
+  const rows =
+    plan.rowsMm.length > 0 ? [box.y1, ...plan.rowsMm.map((row) => plan.depthMm - row), box.y0] : [];
+  const side = chainSide(plan) === 'left' ? -1 : 1;
+  const up = { direction: 'level', outwards: -1 } as const;
+  const foot = { direction: 'level', outwards: 1 } as const;
+  const upright = { direction: 'upright', outwards: side } as const;
+  const given = (stops: readonly number[]) => stops.length > 0;
+  const whole = {
+    ...chain([box.x0, box.x1], level, foot),
+    labels: [`${format(box.x1 - box.x0)} finished, seam to seam`],
+  };
+  const cornersDown = [...corners.upright].reverse();
+  const aboveChains = [corners.above, columns].filter(given).map((stops) => chain(stops, level, up));
+  const uprightChains = [cornersDown, rows].filter(given).map((stops) => chain(stops, down, upright));
+  const unit = uprightChains.length > 0 ? bare : format;
+  const depth = { ...chain([box.y1, box.y0], down, upright), labels: [unit(box.y1 - box.y0)] };
+  const edge = side === -1 ? x : level(box.x1);
+  const above = stacked(sheet, aboveChains, y, FIRST_LEVEL_MM);
+  const below = stacked(
+    sheet,
+    [...(given(corners.below) ? [chain(corners.below, level, foot)] : []), whole],
+    down(box.y0),
+    FOOT_MM,
+  );
+  const uprights = stacked(sheet, [...uprightChains, depth], edge, FIRST_UPRIGHT_MM);
+  const wallGap = (plan.wall?.gapMm ?? 0) * factor;
+  const sides = [reach(sheet, uprights, edge), plan.wall ? WALL_MM + wallGap : 3] as const;
   return {
-    stops: stops.map((mm) => x + mm * factor),
-    labels: spaces(stops, stepMm).map(bareOf(format)),
-    at: y - FIRST_CHAIN_MM,
-    direction: 'level',
-    outwards: -1,
+    above,
+    below,
+    upright: uprights,
+    space: {
+      above: Math.max(4, reach(sheet, above, y) + (plan.wall && given(columns) ? WALL_CHAIN_MM + 3 : 1)),
+      below: reach(sheet, below, down(box.y0)) + 2,
+      left: side === -1 ? sides[0] : sides[1],
+      right: side === -1 ? sides[1] : sides[0],
+    },
   };
 }
 
-export function drawChains(
-  sheet: Sheet,
-  plan: CushionPlan,
-  place: PlanPlace,
-  size: { width: number; depth: number },
-): void {
-  const { x, y, format } = place;
-  if (plan.columnsMm.length > 0) {
-    const columns = columnChain(plan, place);
-    drawChain(sheet, columns);
+/** Columns from seam to seam of the rectangle they are measured in, whatever stands out of it. */
+function columnStops({ columnsMm, datum, widthMm }: CushionPlan): number[] {
+  if (columnsMm.length === 0) return [];
+  const onPage = columnsMm.map((mm) => (datum === 'left' ? mm : widthMm - mm));
+  return [0, ...onPage.sort((a, b) => a - b), widthMm];
+}
+
+/** Gives each chain its line, outside of the one before. */
+function stacked(sheet: Sheet, chains: readonly Unplaced[], edge: number, first: number): Chain[] {
+  const placed: Chain[] = [];
+  for (const chain of chains) {
+    const before = placed.at(-1);
+    const own = chain.direction === 'level' ? 1.8 : chainWidth(sheet, chain) / 2;
+    const off = before
+      ? Math.abs(before.at - edge) + chainDepth(sheet, before) + BETWEEN_MM + own
+      : Math.max(first, chain.direction === 'level' ? 0 : own + 2.4);
+    placed.push({ ...chain, at: edge + chain.outwards * off });
+  }
+  return placed;
+}
+
+function reach(sheet: Sheet, chains: readonly Chain[], edge: number): number {
+  const last = chains.at(-1);
+  return last ? Math.abs(last.at - edge) + chainDepth(sheet, last) + 0.8 : 0;
+}
+
+const bareOf = (format: PlanPlace['format']) => (mm: number) => format(mm).replace(/[″\s\u202f]|mm/g, '');
+
+export function drawChains(sheet: Sheet, plan: CushionPlan, place: PlanPlace, chains: PlanChains): void {
+  for (const chain of [...chains.above, ...chains.below, ...chains.upright]) drawChain(sheet, chain);
+  const columns = chains.above.at(-1);
+  if (columns && plan.columnsMm.length > 0) {
     drawWallChain(sheet, plan, place, columns.at - chainDepth(sheet, columns) - WALL_CHAIN_MM + 2);
   }
-  const foot = y + size.depth + 6;
-  drawChain(sheet, {
-    stops: [x, x + size.width],
-    labels: [`${format(plan.widthMm)} finished, seam to seam`],
-    at: foot,
-    direction: 'level',
-    outwards: 1,
-  });
-  drawGap(sheet, plan, place, foot);
-  drawUprightChains(sheet, plan, place, size);
+  drawGap(sheet, plan, place, chains.below.at(-1)?.at ?? place.y);
 }
 
 function drawGap(sheet: Sheet, plan: CushionPlan, { x, factor, format }: PlanPlace, foot: number): void {
   if (!plan.wall || plan.wall.gapMm <= 0) return;
+  const { x0 } = planBox(plan);
   const right = plan.wall.side === 'right';
-  const edge = right ? x + plan.widthMm * factor : x;
+  const edge = x + ((right ? plan.widthMm : 0) - x0) * factor;
   const wallX = edge + (right ? 1 : -1) * plan.wall.gapMm * factor;
   sheet.line(edge, foot, wallX, foot, { pen: PEN.hair });
   sheet.line(wallX, foot - 1.3, wallX, foot + 1.3, { pen: PEN.hair });
@@ -62,43 +139,13 @@ function drawGap(sheet: Sheet, plan: CushionPlan, { x, factor, format }: PlanPla
   });
 }
 
-function drawUprightChains(
-  sheet: Sheet,
-  plan: CushionPlan,
-  { x, y, factor, format, stepMm }: PlanPlace,
-  size: { width: number; depth: number },
-): void {
-  const bare = bareOf(format);
-  const outwards = chainSide(plan) === 'left' ? -1 : 1;
-  const edge = outwards === -1 ? x : x + size.width;
-  const whole = plan.rowsMm.length > 0 ? bare(plan.depthMm) : format(plan.depthMm);
-  const rowStops = [0, ...plan.rowsMm, plan.depthMm];
-  const rows: Chain = {
-    stops: rowStops.map((mm) => y + mm * factor),
-    labels: spaces(rowStops, stepMm).map(bare),
-    at: edge + outwards * 6.2,
-    direction: 'upright',
-    outwards,
-  };
-  const beyond =
-    plan.rowsMm.length > 0 ? chainDepth(sheet, rows) + sheet.textWidth(whole, { weight: 600 }) / 2 + 2 : 0;
-  if (plan.rowsMm.length > 0) drawChain(sheet, rows);
-  drawChain(sheet, {
-    stops: [y, y + size.depth],
-    labels: [whole],
-    at: rows.at + outwards * beyond,
-    direction: 'upright',
-    outwards,
-  });
-}
-
 /** The quiet line: where the columns stand from the wall, for who sets out along it. */
 function drawWallChain(sheet: Sheet, plan: CushionPlan, { x, factor, format }: PlanPlace, at: number): void {
   if (!plan.wall) return;
+  const { x0 } = planBox(plan);
   const bare = bareOf(format);
-  const width = plan.widthMm * factor;
   const right = plan.wall.side === 'right';
-  const wallX = right ? x + width + plan.wall.gapMm * factor : x - plan.wall.gapMm * factor;
+  const wallX = x + ((right ? plan.widthMm + plan.wall.gapMm : -plan.wall.gapMm) - x0) * factor;
   const onPaper = plan.wall.columnsMm.map((mm) => ({ mm, at: wallX + (right ? -1 : 1) * mm * factor }));
   const farthest = onPaper.at(-1);
   if (!farthest) return;
@@ -112,15 +159,10 @@ function drawWallChain(sheet: Sheet, plan: CushionPlan, { x, factor, format }: P
     sheet.text(bare(mm), tick, at - 1.7, { align: 'center' });
     lastEnd = right ? tick - half : tick + half;
   }
+  const off = sheet.textWidth(bare(farthest.mm)) / 2 + 1.2;
+  const beyond = right ? farthest.at - off : farthest.at + off;
+  const room = right ? farthest.at - x : x + (plan.widthMm - x0) * factor - farthest.at;
   const words = 'from the wall';
-  const beyond = right ? farthest.at - 2.2 : farthest.at + 2.2;
-  const room = (right ? farthest.at - x : x + width - farthest.at) + PLAN_SPACE.chains;
-  if (sheet.textWidth(words) + 3 < room)
+  if (sheet.textWidth(words) + 3 < room + 14)
     sheet.text(words, beyond, at + 1.15, { align: right ? 'right' : 'left' });
-}
-
-/** What lies between neighbouring stops, as whole steps. */
-export function spaces(stops: readonly number[], stepMm: number): number[] {
-  const rounded = stops.map((stop) => Math.round(stop / stepMm) * stepMm);
-  return rounded.slice(1).map((stop, index) => stop - (rounded[index] ?? 0));
 }

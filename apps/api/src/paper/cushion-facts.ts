@@ -1,9 +1,17 @@
-import { curveWords, formatLength, lengthStep } from '@settlewright/geometry';
-import { drawButtonTable } from './button-table';
+import {
+  curveWords,
+  cushionWarningWords,
+  formatLength,
+  HOLD_DOWN_WORDS,
+  lengthStep,
+  outlineExtent,
+  TUFTING_WORDS,
+} from '@settlewright/geometry';
+import { type OrderPages, PAD } from './order-pages';
 import { paragraph } from './paragraph';
-import { drawFacts, type Fact } from './ruled-table';
+import { drawFacts, type Fact, factHeight } from './ruled-table';
 import { leading, type Sheet } from './sheet';
-import type { SpecCushion, SpecPack } from './spec-pack';
+import type { Size, SpecCushion, SpecPack } from './spec-pack';
 import {
   bareLength,
   foamWords,
@@ -19,32 +27,72 @@ import {
 import type { Frame } from './title-block';
 
 export const FACTS_WIDTH_MM = 98;
-export const PAD = 4;
+const LABEL_MM = 19.5;
+const SIGN_MM = 17;
 
-/** The right side of a cushion's sheet: the finished size large, all that follows from it, buttons, signature. */
-export function drawFactsColumn(sheet: Sheet, pack: SpecPack, cushion: SpecCushion, frame: Frame): void {
+/** The right side of a cushion's sheet: the finished size large, all that follows from it, signature. */
+export function drawFactsColumn(
+  pages: OrderPages,
+  { sheet, topic }: { sheet: Sheet; topic: readonly string[] },
+  pack: SpecPack,
+  cushion: SpecCushion,
+  frame: Frame,
+): void {
   const { units } = pack;
   const x = frame.left + PAD;
   const width = frame.right - PAD - x;
   sheet.text('FINISHED, seam to seam', x, frame.top + 5.6);
   drawHeroSize(sheet, cushion, pack, x, frame.top + 14.6);
-  const tolerance = units.system === 'millimetres' ? '± 6 mm' : '± ¼″';
-  const lead = `${otherSystemWords(cushion.finished, units)}, ${tolerance}. Thickness is the boxing between seams.`;
-  let y = paragraph(sheet, lead, x, frame.top + 20.6, width) - leading(9) + 2.2;
-  y = drawFacts(sheet, factsOf(cushion, pack), { x, y, width, labelWidth: 17 });
-  const floor = frame.bottom - 13;
-  y = drawButtonTable(sheet, cushion, pack, { x, y: y + 2.4, width, floor: floor - 14 });
-  const taken = 'Taken as given: new foam on a flat board. Fit one cushion before cutting the rest.';
-  paragraph(sheet, taken, x, Math.min(y + 4.6, floor - 8), width);
+  const tolerance = `± ${formatLength(pack.toleranceMm, { ...units, feet: false })}`;
+  const lead = `${otherSystemWords(boxOf(cushion), units)}, ${tolerance}${cushion.row.needsTemplate ? ', the box round the outline' : ''}. Thickness is the boxing between seams.`;
+  const y = paragraph(sheet, lead, x, frame.top + 20.6, width) - leading(9) + 2.2;
+  const facts = factsOf(cushion, pack);
+  const box = { x, y, width, labelWidth: LABEL_MM };
+  const room = frame.bottom - SIGN_MM - 4 - y;
+  const here = fitting(sheet, facts, box, room);
+  const foot = drawFacts(sheet, facts.slice(0, here), box);
+  if (here < facts.length) sheet.text('More of this cushion stands on the next sheet.', x, foot + 4);
   const sign = frame.bottom - 8;
+  sheet.text('Fit one cushion before cutting the rest.', x, sign - 6.6);
   sheet.line(x, sign, x + width - 32, sign);
   sheet.line(x + width - 26, sign, x + width, sign);
   sheet.text('Agreed by', x, sign + 4.2);
   sheet.text('Date', x + width - 26, sign + 4.2);
+  if (here < facts.length) drawRest(pages, topic, facts.slice(here));
 }
 
+/** How many facts find room. */
+function fitting(
+  sheet: Sheet,
+  facts: readonly Fact[],
+  box: { width: number; labelWidth: number },
+  room: number,
+): number {
+  let used = 0;
+  const over = facts.findIndex((fact) => (used += factHeight(sheet, fact, box)) > room);
+  return over === -1 ? facts.length : over;
+}
+
+function drawRest(pages: OrderPages, topic: readonly string[], facts: readonly Fact[]): void {
+  let rest = facts;
+  while (rest.length > 0) {
+    const page = pages.page(topic, `${topic[0] ?? ''}, continued`);
+    const { left, right, bottom } = page.frame;
+    const box = { x: left + PAD, y: page.y, width: right - left - 2 * PAD, labelWidth: 24 };
+    const here = Math.max(1, fitting(page.sheet, rest, box, bottom - page.y - 2));
+    drawFacts(page.sheet, rest.slice(0, here), box);
+    rest = rest.slice(here);
+  }
+}
+
+/** Size of the box round the outline. */
+export const boxOf = ({ row: { spec } }: SpecCushion): Size => ({
+  ...outlineExtent(spec.outline),
+  thicknessMm: spec.finishedMm.thicknessMm,
+});
+
 function drawHeroSize(sheet: Sheet, cushion: SpecCushion, { units }: SpecPack, x: number, y: number): void {
-  const { widthMm, depthMm, thicknessMm } = cushion.finished;
+  const { widthMm, depthMm, thicknessMm } = boxOf(cushion);
   const numbers = [
     bareLength(widthMm, units),
     bareLength(depthMm, units),
@@ -64,9 +112,11 @@ function drawHeroSize(sheet: Sheet, cushion: SpecCushion, { units }: SpecPack, x
 
 function factsOf(cushion: SpecCushion, pack: SpecPack): Fact[] {
   const { units, words } = pack;
-  const { panels, board, closure } = cushion;
+  const { panels, board, closure, row } = cushion;
+  const { spec } = row;
   const show = (mm: number) => formatLength(mm, { ...units, feet: false });
-  const count = cushion.buttons.columnsMm.length * cushion.buttons.rowsMm.length;
+  const { count } = spec.buttons;
+  const camera = spec.cameraSides.map((edge) => EDGE_NAMES[cushion.kind][edge]);
   const on = cushion.benches.map((bench, i) => `${cushion.marks[i]} for ${bench}`);
   const made = `${on.slice(0, 6).join(', ')}${on.length > 6 ? ' …' : ''}`;
   const facts: [string, string][] = [
@@ -93,16 +143,40 @@ function factsOf(cushion: SpecCushion, pack: SpecPack): Fact[] {
         ? `${closure.word} ${closureWords(cushion, units)} of ${show(cushion.perimeterMm)} round`
         : closure.word,
     ],
-    ['Buttons', count > 0 ? `${count}${words.buttons ? `, ${brief(words.buttons)}` : ''}` : 'none'],
+    [
+      'Buttons',
+      count > 0
+        ? `${count}, ${TUFTING_WORDS[spec.tufting.kind]}${words.buttons ? `, ${brief(words.buttons)}` : ''}; table on the button sheet`
+        : 'none',
+    ],
     ['Board', board ? pairWords(board.widthMm, board.depthMm, units) : ''],
     ['Curve', cushion.curve ? curveWords(cushion.curve, units) : ''],
-    ['Cover', words.cover && brief(words.cover)],
-    ['Fixing', words.fixing && brief(words.fixing)],
+    ['Cover', coverWords(row.covers, words.cover && brief(words.cover))],
+    ['Camera', camera.length > 0 ? `sees the ${camera.join(', ')}` : ''],
+    [
+      'Hold-down',
+      [spec.holdDown && HOLD_DOWN_WORDS[spec.holdDown], words.fixing && brief(words.fixing)]
+        .filter(Boolean)
+        .join('; '),
+    ],
+    ['Template', row.needsTemplate ? 'at full size in this pack' : ''],
+    ['Look at', spec.warnings.map((warning) => cushionWarningWords(warning, units)).join(' ')],
+    ['Notes', spec.notes ?? ''],
   ];
   return facts
     .filter(([, value]) => value !== '')
     .map(([label, value]) => ({ label, value: [{ text: value, weight: 600 }] }));
 }
+
+/** Names of the cloths and what was written of them, the same thing once. */
+export function coverWords(names: readonly string[], written: string): string {
+  return [...names.filter((name) => !written.startsWith(name)), written].filter(Boolean).join('; ');
+}
+
+const EDGE_NAMES = {
+  seat: { back: 'back edge', front: 'front edge', left: 'sitter’s left end', right: 'sitter’s right end' },
+  back: { back: 'top edge', front: 'bottom edge', left: 'sitter’s left end', right: 'sitter’s right end' },
+} as const;
 
 function mirrorWords({ mirrorMarks }: SpecCushion): string {
   if (mirrorMarks.length === 0) return '';

@@ -1,41 +1,67 @@
-import { drawChains, spaceAbove } from './cushion-chains';
+import {
+  offsetFault,
+  offsetOutline,
+  type OutlineCorner,
+  outlinePoints,
+  type Point2,
+} from '@settlewright/geometry';
+import { drawClothWay } from './cloth-way';
+import { drawChains, type PlanChains } from './cushion-chains';
+import { type CushionPlan, onPaper, planBox, type PlanPlace } from './plan-place';
 import { PEN, type Sheet } from './sheet';
-import type { CushionPlan, PlanPlace } from './plan-place';
+import { TakenSpace, type WordPlace } from './taken-space';
 
-export function drawCushionPlan(sheet: Sheet, plan: CushionPlan, place: PlanPlace): void {
-  const width = plan.widthMm * place.factor;
-  const depth = plan.depthMm * place.factor;
-  const { x, y } = place;
-  const across = (mm: number) =>
-    plan.datum === 'left' ? x + mm * place.factor : x + width - mm * place.factor;
-  drawBoardLines(sheet, plan, { across, y, depth });
-  sheet.rect(x, y, width, depth, { pen: PEN.edge });
-  sheet.rect(x + 0.9, y + 0.9, width - 1.8, depth - 1.8, { pen: PEN.hair });
-  drawWall(sheet, plan, { x, y, width, depth, place });
-  drawClosure(sheet, plan, { x, y, width, depth, factor: place.factor });
-  for (const column of plan.columnsMm) {
-    for (const row of plan.rowsMm) drawButton(sheet, across(column), y + row * place.factor);
-  }
-  nameEdges(sheet, plan, { x, y, width, depth, factor: place.factor });
-  drawChains(sheet, plan, place, { width, depth });
+const BUTTON_MM = 1.35;
+const SAG_MM = 0.5;
+
+/** What drawing a plan needs to know of the paper it stands on. */
+interface Figure {
+  sheet: Sheet;
+  plan: CushionPlan;
+  place: PlanPlace;
+  at: (point: Point2) => Point2;
+  taken: TakenSpace;
 }
 
-function drawBoardLines(
-  sheet: Sheet,
-  plan: CushionPlan,
-  at: { across: (mm: number) => number; y: number; depth: number },
-): void {
+/** A cushion from above by its real outline, back edge up, with seams, closure, buttons, words and chains. */
+export function drawCushionPlan(sheet: Sheet, plan: CushionPlan, place: PlanPlace, chains: PlanChains): void {
+  const figure: Figure = { sheet, plan, place, at: onPaper(plan, place), taken: new TakenSpace() };
+  drawBoardLines(figure);
+  drawOutline(figure);
+  drawWall(figure, chains);
+  drawClosure(figure);
+  for (const spot of plan.buttons) drawButton(figure, figure.at(spot));
+  nameEdges(figure);
+  drawClothWay(sheet, plan.cloth, boxOnPaper(figure), figure.taken);
+  nameRadii(figure);
+  drawChains(sheet, plan, place, chains);
+}
+
+function boxOnPaper({ plan, at }: Figure) {
+  const { x0, x1, y0, y1 } = planBox(plan);
+  const [left, top] = at([x0, y1]);
+  const [right, bottom] = at([x1, y0]);
+  return { x: left, y: top, width: right - left, height: bottom - top };
+}
+
+function drawOutline({ sheet, plan, place, at }: Figure): void {
+  const path = (corners: readonly OutlineCorner[]) => outlinePoints(corners, SAG_MM).map(at);
+  sheet.path(path(plan.outline), { pen: PEN.edge, closed: true });
+  const inner = offsetOutline(plan.outline, -0.9 / place.factor);
+  if (!offsetFault(plan.outline, inner)) sheet.path(path(inner), { pen: PEN.hair, closed: true });
+}
+
+function drawBoardLines(figure: Figure): void {
+  const { sheet, plan, at } = figure;
+  const box = boxOnPaper(figure);
   for (const line of plan.boardLinesMm) {
-    sheet.line(at.across(line), at.y - 1.8, at.across(line), at.y + at.depth + 1.8, {
-      pen: PEN.hair,
-      dash: [1.3, 0.9],
-      grey: 110,
-    });
+    const [x] = at([plan.datum === 'left' ? line : plan.widthMm - line, 0]);
+    sheet.line(x, box.y - 1.8, x, box.y + box.height + 1.8, { pen: PEN.hair, dash: [1.3, 0.9], grey: 110 });
   }
 }
 
-function drawButton(sheet: Sheet, x: number, y: number): void {
-  sheet.circle(x, y, 1.35, { pen: 0.28, fill: 255 });
+function drawButton({ sheet, taken }: Figure, [x, y]: Point2): void {
+  sheet.circle(x, y, BUTTON_MM, { pen: 0.28, fill: 255 });
   for (const [dx, dy] of [
     [1, 1],
     [-1, 1],
@@ -44,85 +70,103 @@ function drawButton(sheet: Sheet, x: number, y: number): void {
   ] as const) {
     sheet.line(x + dx * 1.4, y + dy * 1, x + dx * 2.6, y + dy * 1.7, { pen: PEN.hair });
   }
+  taken.take({ x: x - 2.6, y: y - 1.8, width: 5.2, height: 3.6 });
 }
 
-function drawClosure(
-  sheet: Sheet,
-  plan: CushionPlan,
-  at: { x: number; y: number; width: number; depth: number; factor: number },
-): void {
-  const { x, width } = at;
-  const { closure } = plan;
-  // Closures in the ends are said in words alone.
-  if (!closure || closure.edge === 'left' || closure.edge === 'right') return;
-  const inwards = closure.edge === 'back' ? 1 : -1;
-  const edge = closure.edge === 'back' ? at.y : at.y + at.depth;
-  const end = edge + inwards * closure.wrapMm * at.factor;
-  sheet.line(x, edge, x + width, edge, { pen: PEN.cut });
-  for (const side of [x, x + width]) {
-    sheet.line(side, edge, side, end, { pen: PEN.cut });
-    sheet.line(side - 1.6, end, side + 1.6, end, { pen: PEN.edge });
-  }
-  if (Math.abs(end - edge) > 7 && width > 60) {
-    sheet.flag('ends here', x + 3, end + 1.1);
-    sheet.flag('ends here', x + width - 3, end + 1.1, { align: 'right' });
+/** A heavy line along the closure and round both ends, each end ticked and, where there is room, named. */
+function drawClosure(figure: Figure): void {
+  const { sheet, plan, at, taken } = figure;
+  if (!plan.closure) return;
+  const { path, wrapMm } = plan.closure;
+  const points = path.map(at);
+  sheet.path(points, { pen: PEN.cut });
+  if (wrapMm === 0) return;
+  const box = boxOnPaper(figure);
+  for (const [end, next] of [points.slice(0, 2), points.slice(-2).reverse()]) {
+    if (!end || !next) continue;
+    const length = Math.hypot(next[0] - end[0], next[1] - end[1]) || 1;
+    const across = [(-(next[1] - end[1]) / length) * 1.6, ((next[0] - end[0]) / length) * 1.6] as const;
+    sheet.line(end[0] - across[0], end[1] - across[1], end[0] + across[0], end[1] + across[1], {
+      pen: PEN.edge,
+    });
+    if (length < 7 || box.width < 60) continue;
+    const inwards = end[0] < box.x + box.width / 2 ? 1 : -1;
+    taken.write(sheet, 'ends here', [
+      { x: end[0] + inwards * 3, y: end[1] + 1.1, align: inwards > 0 ? 'left' : 'right' },
+    ]);
   }
 }
 
-function drawWall(
-  sheet: Sheet,
-  plan: CushionPlan,
-  at: { x: number; y: number; width: number; depth: number; place: PlanPlace },
-): void {
+function drawWall({ sheet, plan, place, at }: Figure, chains: PlanChains): void {
   if (!plan.wall) return;
-  const { x, y, width, depth, place } = at;
+  const { y0, y1 } = planBox(plan);
   const right = plan.wall.side === 'right';
-  const gap = plan.wall.gapMm * place.factor;
-  const wallX = right ? x + width + gap : x - gap;
-  const top = y - spaceAbove(sheet, plan, place) + 4;
-  sheet.line(wallX, top, wallX, y + depth + 2.5, { pen: 0.5 });
-  sheet.hatchBeside(wallX, top, y + depth + 2.5, right ? 1 : -1);
-  uprightWords(sheet, plan.wall.name, wallX + (right ? 4.6 : -3.4), y, depth);
+  const [x] = at([right ? plan.widthMm + plan.wall.gapMm : -plan.wall.gapMm, 0]);
+  const top = place.y - chains.space.above + 4;
+  const foot = place.y + (y1 - y0) * place.factor + 2.5;
+  sheet.line(x, top, x, foot, { pen: 0.5 });
+  sheet.hatchBeside(x, top, foot, right ? 1 : -1);
+  const room = foot - place.y - 4;
+  if (sheet.textWidth(plan.wall.name) > room) return;
+  sheet.text(plan.wall.name, x + (right ? 4.6 : -3.4), place.y + room / 2, { angleDeg: 90, align: 'center' });
 }
 
-/** Words that read along an upright edge, only where the edge is long enough to carry them. */
-function uprightWords(sheet: Sheet, words: string, x: number, y: number, room: number): void {
-  const length = sheet.textWidth(words);
-  if (length > room - 2) return;
-  sheet.text(words, x, y + room / 2, { angleDeg: 90, align: 'center' });
-}
-
-function nameEdges(
-  sheet: Sheet,
-  plan: CushionPlan,
-  at: { x: number; y: number; width: number; depth: number; factor: number },
-): void {
-  const { x, y, width, depth, factor } = at;
-  const middle = x + width / 2;
-  const room = width - 12;
-  const words = (edge: 'back' | 'front') =>
-    firstThatFits(
-      sheet,
-      [plan.closure?.edge === edge ? `${plan.edges[edge]} · ${plan.closure.words}` : '', plan.edges[edge]],
-      room,
-    );
-  if (depth >= 14) {
-    const back = words('back');
-    if (back) sheet.flag(back, middle, y + 4.4, { align: 'center' });
-    const front = words('front');
-    if (front) sheet.flag(front, middle, y + depth - 2, { align: 'center' });
+/** What each edge is called, beside it on the inside; the longest words that find room. */
+function nameEdges(figure: Figure): void {
+  const { sheet, plan, taken } = figure;
+  const box = boxOnPaper(figure);
+  const [middleX, middleY] = [box.x + box.width / 2, box.y + box.height / 2];
+  const across = crossings(figure, 'x', middleX);
+  const along = crossings(figure, 'y', middleY);
+  if (across && across[1] - across[0] >= 14) {
+    for (const [edge, y] of [
+      ['back', across[0] + 4.4],
+      ['front', across[1] - 2],
+    ] as const) {
+      const whole = plan.closure?.edge === edge ? `${plan.edges[edge]} · ${plan.closure.words}` : '';
+      const places: WordPlace[] = [0, -0.2, 0.2].map((off) => ({ x: middleX + off * box.width, y }));
+      for (const words of [whole, plan.edges[edge]]) {
+        if (words === '' || sheet.textWidth(words) > box.width - 12) continue;
+        if (taken.write(sheet, words, places, { align: 'center' })) break;
+      }
+    }
   }
-  const wrap = (plan.closure?.wrapMm ?? 0) * factor + 3;
-  const [above, below] = plan.closure?.edge === 'back' ? [Math.max(6, wrap), 3] : [3, Math.max(6, wrap)];
-  flagUpright(sheet, plan.edges.left, x + 4, y + above, depth - above - below);
-  flagUpright(sheet, plan.edges.right, x + width - 1.8, y + above, depth - above - below);
+  if (!along) return;
+  for (const [words, x] of [
+    [plan.edges.left, along[0] + 4],
+    [plan.edges.right, along[1] - 1.8],
+  ] as const) {
+    if (sheet.textWidth(words) > box.height - 9) continue;
+    const places = [0, 3, -3, 6, -6].map((off) => ({ x, y: middleY + off }));
+    taken.write(sheet, words, places, { angleDeg: 90, align: 'center' });
+  }
 }
 
-function flagUpright(sheet: Sheet, words: string, x: number, y: number, room: number): void {
-  if (sheet.textWidth(words) > room) return;
-  sheet.flag(words, x, y + room / 2, { angleDeg: 90, align: 'center' });
+/** Where a line through the middle of the page first enters and last leaves the outline. */
+function crossings({ plan, at }: Figure, axis: 'x' | 'y', value: number): [number, number] | undefined {
+  const [n, other] = axis === 'x' ? ([0, 1] as const) : ([1, 0] as const);
+  const points = outlinePoints(plan.outline, SAG_MM).map(at);
+  const met = points.flatMap((a, i) => {
+    const b = points[(i + 1) % points.length]!;
+    if (a[n] > value === b[n] > value) return [];
+    return [a[other] + ((value - a[n]) / (b[n] - a[n])) * (b[other] - a[other])];
+  });
+  return met.length < 2 ? undefined : [Math.min(...met), Math.max(...met)];
 }
 
-function firstThatFits(sheet: Sheet, candidates: readonly string[], room: number): string | undefined {
-  return candidates.find((words) => words !== '' && sheet.textWidth(words) <= room);
+/** Radii of round corners, each inside its corner; equal ones that find no room stand in the template's table. */
+function nameRadii({ sheet, plan, place, at, taken }: Figure): void {
+  const box = planBox(plan);
+  const middle = at([(box.x0 + box.x1) / 2, (box.y0 + box.y1) / 2]);
+  for (const { at: corner, radiusMm } of plan.outline) {
+    if (radiusMm < 0.5) continue;
+    const [x, y] = at(corner);
+    const [dx, dy] = [Math.sign(middle[0] - x) || 1, Math.sign(middle[1] - y) || 1];
+    const places = [6, 9, 12, 16, 20].map((off) => ({
+      x: x + dx * (off - 1),
+      y: y + dy * off * 0.8 + 1.15,
+      align: dx > 0 ? ('left' as const) : ('right' as const),
+    }));
+    taken.write(sheet, `R ${place.format(radiusMm)}`, places, { weight: 600 });
+  }
 }

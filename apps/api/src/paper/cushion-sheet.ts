@@ -1,29 +1,46 @@
-import { formatLength, lengthStep, scaleFor } from '@settlewright/geometry';
+import {
+  buttonSpots,
+  type Construction,
+  closurePath,
+  formatLength,
+  lengthStep,
+  OFF_JOINT_MM,
+  scaleWords,
+  shopScales,
+} from '@settlewright/geometry';
 import { CHECK_BAR_MM, drawCheckBar } from './check-bar';
-import { spaceAbove, spaces } from './cushion-chains';
-import { closureWords, drawFactsColumn, FACTS_WIDTH_MM, PAD } from './cushion-facts';
+import { type PlanChains, planChains, spaces } from './cushion-chains';
+import { closureWords, drawFactsColumn, FACTS_WIDTH_MM } from './cushion-facts';
 import { drawCushionPlan } from './cushion-plan';
-import { drawCushionCut, drawCushionFront } from './cushion-views';
-import { paragraph } from './paragraph';
-import { chainSide, type CushionPlan, PLAN_SPACE } from './plan-place';
+import { drawCushionFront, drawCushionSection } from './cushion-views';
+import { type OrderPages, PAD } from './order-pages';
+import { linesNeeded, paragraph } from './paragraph';
+import { type CushionPlan, planBox, type PlanPlace } from './plan-place';
+import { sectionWords } from './section-words';
 import { leading, PEN, type Sheet } from './sheet';
 import type { SpecCushion, SpecPack } from './spec-pack';
-import { bareLength, sinkWords } from './spec-words';
+import { bareLength, handWords, marksWords, sinkWords } from './spec-words';
 import { type Frame, frameOf } from './title-block';
 
-const FOOT_MM = 34;
+const FOOT_MM = 44;
+const HEAD_MM = 12;
+const SUM_SIZE = 9.5;
 
-/** One sheet for cushions that are made alike. */
-export function drawCushionSheet(sheet: Sheet, pack: SpecPack, cushion: SpecCushion): void {
+/** One sheet for cushions that are made alike, and a second where their facts find no room on it. */
+export function drawCushionSheet(pages: OrderPages, pack: SpecPack, cushion: SpecCushion): void {
+  const topic = [
+    marksWords(cushion.marks),
+    `${cushion.kind}, ${handWords(cushion.hand)}, make ${cushion.marks.length}`,
+  ];
+  const sheet = pages.add(topic);
   const frame = frameOf(sheet);
   const split = frame.right - FACTS_WIDTH_MM;
   sheet.line(split, frame.top, split, frame.bottom, { pen: PEN.fine });
   drawFigures(sheet, pack, cushion, { ...frame, right: split });
-  drawFactsColumn(sheet, pack, cushion, { ...frame, left: split });
+  drawFactsColumn(pages, { sheet, topic }, pack, cushion, { ...frame, left: split });
 }
 
 function drawFigures(sheet: Sheet, pack: SpecPack, cushion: SpecCushion, frame: Frame): void {
-  const { units } = pack;
   const left = frame.left + PAD;
   const right = frame.right - PAD;
   const width = right - left;
@@ -35,64 +52,65 @@ function drawFigures(sheet: Sheet, pack: SpecPack, cushion: SpecCushion, frame: 
   const hand =
     cushion.hand === 'either' ? 'sitter’s left is at the right' : `drawn: ${cushion.hand} hand as sat in`;
   sheet.text(hand, right, frame.top + 6.2, { weight: 600, align: 'right' });
-
-  const { widthMm, depthMm, thicknessMm } = cushion.finished;
   const plan = planOf(cushion, pack);
-  const planSpace = {
-    widthMm: width - PLAN_SPACE.chains - PLAN_SPACE.wall,
-    heightMm: frame.bottom - frame.top - FOOT_MM - 62,
-  };
-  // A usual gap finds room beside the wall's name.
-  const gap = Math.max(0, (plan.wall?.gapMm ?? 0) - 40);
-  const scale = scaleFor(
-    units.system,
-    { widthMm: widthMm + gap, heightMm: depthMm + thicknessMm },
-    planSpace,
+  const sums = sumLines(cushion, pack);
+  const sumsHigh = sums.reduce(
+    (high, line) => high + linesNeeded(sheet, line, width, { size: SUM_SIZE }) * leading(SUM_SIZE),
+    sums.length > 0 ? 3 : 0,
   );
-  const { factor } = scale;
-  const before = chainSide(plan) === 'left' ? PLAN_SPACE.chains : PLAN_SPACE.wall + gap * factor;
-  const place = {
-    x: left + before,
-    y: frame.top + 12,
-    factor,
-    format: (mm: number) => formatLength(mm, { ...units, feet: false }),
-    stepMm: lengthStep(units),
-  };
-  place.y += spaceAbove(sheet, plan, place);
-  drawCushionPlan(sheet, plan, place);
-
-  let y = place.y + depthMm * factor + PLAN_SPACE.bottom;
-  y = drawSums(sheet, pack, cushion, { x: left, y, width });
-  const front = y + 9.5;
+  const room = frame.bottom - frame.top - HEAD_MM - FOOT_MM - sumsHigh;
+  const { place, chains, scale } = placed(sheet, plan, pack, { width, height: room, cushion });
+  const at = { ...place, x: left + chains.space.left, y: frame.top + HEAD_MM + chains.space.above };
+  const moved = planChains(sheet, plan, at);
+  drawCushionPlan(sheet, plan, at, moved);
+  const box = planBox(plan);
+  const under = at.y + (box.y1 - box.y0) * at.factor + moved.space.below;
+  const y = drawSums(sheet, sums, { x: left, y: under, width });
+  const { thicknessMm, widthMm } = cushion.finished;
   sheet.text(cushion.kind === 'seat' ? 'From the front' : 'From above', left, y + 5.4);
+  if (cushion.cloth) sheet.text(cushion.cloth.words, right, y + 5.4, { align: 'right', weight: 600 });
   drawCushionFront(
     sheet,
-    {
-      widthMm,
-      thicknessMm,
-      words: `boxing ${formatLength(thicknessMm, { ...units, feet: false })} between welt seams; crown up to ${units.system === 'millimetres' ? '6 mm' : '¼″'} more`,
-      thicknessWords: formatLength(thicknessMm, { ...units, feet: false }),
-    },
-    { x: place.x, y: front, factor },
+    { widthMm, thicknessMm, words: frontWords(cushion, pack), thicknessWords: at.format(thicknessMm) },
+    { x: at.x - box.x0 * at.factor, y: y + 9.5, factor: at.factor },
   );
-  drawFoot(sheet, pack, cushion, {
-    left,
-    right,
-    top: frame.bottom - FOOT_MM,
-    factor,
-    scaleWords: scale.words,
+  drawFoot(sheet, pack, cushion, { left, right, top: frame.bottom - FOOT_MM, scaleWords: scale });
+}
+
+/** The largest scale of a shop's ruler at which the plan finds room with all its chains. */
+function placed(
+  sheet: Sheet,
+  plan: CushionPlan,
+  { units }: SpecPack,
+  room: { width: number; height: number; cushion: SpecCushion },
+): { place: PlanPlace; chains: PlanChains; scale: string } {
+  const box = planBox(plan);
+  const format = (mm: number) => formatLength(mm, { ...units, feet: false });
+  const tried = shopScales(units.system).map((ratio) => {
+    const place = { x: 0, y: 0, factor: 1 / ratio, format, stepMm: lengthStep(units) };
+    const chains = planChains(sheet, plan, place);
+    const { above, below, left, right } = chains.space;
+    const front = 9.5 + room.cushion.finished.thicknessMm / ratio + 3;
+    const fits =
+      left + (box.x1 - box.x0) / ratio + right <= room.width &&
+      above + (box.y1 - box.y0) / ratio + below + front <= room.height;
+    return { place, chains, scale: scaleWords(units.system, ratio), fits };
   });
+  return tried.find(({ fits }) => fits) ?? tried.at(-1)!;
 }
 
 function planOf(cushion: SpecCushion, { units }: SpecPack): CushionPlan {
-  const { closure, edges, finished } = cushion;
+  const { closure, edges, row, cloth } = cushion;
+  const { spec } = row;
   const { rowsMm, columnsMm, datum, boardLinesMm } = cushion.buttons;
   const { side, name, toSeamMm, columnsMm: fromDatum } = datum;
   return {
-    widthMm: finished.widthMm,
-    depthMm: finished.depthMm,
-    columnsMm,
-    rowsMm,
+    widthMm: spec.finishedMm.widthMm,
+    depthMm: spec.finishedMm.depthMm,
+    outline: spec.outline,
+    columnsMm: rowsMm.length > 0 ? columnsMm : [],
+    rowsMm: columnsMm.length > 0 ? rowsMm : [],
+    buttons: buttonSpots(spec),
     datum: side,
     boardLinesMm,
     wall: datum.drawn ? { side, gapMm: toSeamMm, columnsMm: fromDatum, name } : null,
@@ -101,40 +119,63 @@ function planOf(cushion: SpecCushion, { units }: SpecPack): CushionPlan {
       closure.edgeMm > 0
         ? {
             edge: closure.edge,
+            path: closurePath(spec.outline, closure.edge, closure.wrapMm),
             wrapMm: closure.wrapMm,
             words: `${closure.word} ${closureWords(cushion, units)}`,
           }
         : null,
+    cloth,
   };
 }
 
+/** What the view from the front says of its edge. */
+function frontWords({ row: { spec }, finished }: SpecCushion, { units }: SpecPack): string {
+  const show = (mm: number) => formatLength(mm, { ...units, feet: false });
+  const crown = `crown up to ${units.system === 'millimetres' ? '6 mm' : '¼″'} more`;
+  const strip = show(spec.making?.edgeHeightMm ?? finished.thicknessMm);
+  const words: Record<Construction, string> = {
+    boxed: `boxing ${strip} between seams; ${crown}`,
+    'tight-boxed': `boxing ${strip} between seams, tight over the foam`,
+    'knife-edge': 'knife edge: one seam at half the height',
+    waterfall: `front in one piece with top and bottom; ${crown}`,
+    bullnose: `half-round front in one piece; ${crown}`,
+    'plywood-backed': 'cover pulled round the board and stapled under it',
+  };
+  return words[spec.make.construction];
+}
+
 /** The chains once more as sums, for whoever sets out with a rule. */
-function drawSums(
-  sheet: Sheet,
-  pack: SpecPack,
-  cushion: SpecCushion,
-  at: { x: number; y: number; width: number },
-): number {
-  const { units } = pack;
+function sumLines(cushion: SpecCushion, { units }: SpecPack): string[] {
   const { columnsMm, rowsMm, datum, seamName } = cushion.buttons;
-  if (columnsMm.length === 0 || rowsMm.length === 0) return at.y;
+  if (columnsMm.length === 0 || rowsMm.length === 0) return [];
   const step = lengthStep(units);
+  const show = (mm: number) => formatLength(mm, { ...units, feet: false });
   const sum = (stops: readonly number[], whole: number) => {
     const parts = spaces([0, ...stops, whole], step).map((mm) => bareLength(mm, units));
-    return `${shortSum(parts)} = ${formatLength(whole, { ...units, feet: false })}`;
+    return `${shortSum(parts)} = ${show(whole)}`;
   };
   const seam = cushion.kind === 'seat' ? 'back' : 'top';
-  const lines = [
+  const beyond = cushion.row.spec.warnings.some(({ code }) => code === 'off-joint');
+  return [
     `From the ${seamName} seam ${sum(columnsMm, cushion.finished.widthMm)}.`,
     `Rows from the ${seam} seam ${sum(rowsMm, cushion.finished.depthMm)}.` +
       (datum.drawn
-        ? ` Quiet line: from the ${datum.name}, ${formatLength(datum.toSeamMm, { ...units, feet: false })} from there to the seam.`
-        : ` The ${datum.name} is ${formatLength(datum.toSeamMm, { ...units, feet: false })} from that seam.`),
+        ? ` Quiet line: from the ${datum.name}, ${show(datum.toSeamMm)} from there to the seam.`
+        : ` The ${datum.name} is ${show(datum.toSeamMm)} from that seam.`) +
+      (beyond ? ` CHECK: columns more than ${show(OFF_JOINT_MM)} off a joint, see the button sheet.` : ''),
   ];
+}
+
+function drawSums(
+  sheet: Sheet,
+  lines: readonly string[],
+  at: { x: number; y: number; width: number },
+): number {
+  if (lines.length === 0) return at.y;
   sheet.line(at.x, at.y, at.x + at.width, at.y, { pen: PEN.fine });
   let y = at.y + 4.4;
-  for (const line of lines) y = paragraph(sheet, line, at.x, y, at.width, { size: 9.5 });
-  const foot = y - leading(9.5) + 1.8;
+  for (const line of lines) y = paragraph(sheet, line, at.x, y, at.width, { size: SUM_SIZE });
+  const foot = y - leading(SUM_SIZE) + 1.8;
   sheet.line(at.x, foot, at.x + at.width, foot, { pen: PEN.fine });
   return foot;
 }
@@ -155,33 +196,42 @@ function drawFoot(
   sheet: Sheet,
   pack: SpecPack,
   cushion: SpecCushion,
-  at: { left: number; right: number; top: number; factor: number; scaleWords: string },
+  at: { left: number; right: number; top: number; scaleWords: string },
 ): void {
   const { units } = pack;
+  const { spec } = cushion.row;
   sheet.line(at.left, at.top, at.right, at.top, { pen: PEN.fine });
-  const rows = cushion.buttons.rowsMm.length > 0;
-  const words = `Cut ${rows ? 'at a button row' : 'through the middle'}, ${cushion.kind === 'seat' ? 'front at the right' : 'face up'}`;
-  sheet.text(words, at.left, at.top + 4.6);
+  const left = cushion.kind === 'seat' ? 'back' : 'top';
+  sheet.text(`Section, ${left} edge at the left, not to scale`, at.left, at.top + 4.6);
   const barX = at.right - CHECK_BAR_MM;
-  const most = (barX - at.left - 34) / cushion.finished.depthMm;
-  drawCushionCut(
+  const { closureEdge, welt, closure } = spec.make;
+  drawCushionSection(
     sheet,
     {
-      depthMm: cushion.finished.depthMm,
-      thicknessMm: cushion.finished.thicknessMm,
-      rowsMm: cushion.buttons.rowsMm,
-      foamWords: `foam ${formatLength(cushion.foam.thicknessMm, { ...units, feet: false })}`,
-      groundWords: cushion.kind === 'seat' ? 'deck' : 'back board',
+      construction: spec.make.construction,
+      thicknessMm: spec.finishedMm.thicknessMm,
+      stripMm: spec.making?.edgeHeightMm ?? spec.finishedMm.thicknessMm,
+      welted: welt !== 'none',
+      closureAt:
+        closure !== 'stapled' && (closureEdge === 'front' || closureEdge === 'back') ? closureEdge : null,
+      buttonPullMm: spec.buttons.count > 0 ? spec.tufting.pullMm : null,
+      words: sectionWords(spec, units),
     },
-    { x: at.left + 4, y: at.top + 9, factor: Math.min(at.factor, most, 14 / cushion.finished.thicknessMm) },
+    { x: at.left, y: at.top + 9, width: barX - at.left - 5, height: FOOT_MM - 12 },
   );
-  sheet.text(`Scale ${at.scaleWords}. Sizes govern.`, barX, at.top + 4.6, { weight: 600 });
-  drawCheckBar(sheet, barX, at.top + 13);
+  paragraph(
+    sheet,
+    [{ text: `Scale of the plan ${at.scaleWords}. Sizes govern.`, weight: 600 }],
+    barX,
+    at.top + 4.6,
+    CHECK_BAR_MM,
+  );
+  drawCheckBar(sheet, barX, at.top + 18);
   const sink =
     cushion.kind === 'seat'
       ? sinkWords(cushion, units)
       : 'The back cushion is drawn as it is before anybody leans on it.';
-  paragraph(sheet, sink, barX, at.top + 19.2, CHECK_BAR_MM);
+  paragraph(sheet, sink, barX, at.top + 26, CHECK_BAR_MM);
 }
 
 function headMarks({ marks }: SpecCushion): string {

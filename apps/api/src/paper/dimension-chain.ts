@@ -24,13 +24,18 @@ const ROW_MM = 3.9;
 const LABEL_HEIGHT_MM = 3.6;
 const TICK_MM = 1.3;
 
-const styleOf = (chain: Chain): TextStyle => ({ size: 9, weight: chain.quiet ? 400 : 600, align: 'center' });
+const styleOf = (chain: Pick<Chain, 'quiet'>): TextStyle => ({
+  size: 9,
+  weight: chain.quiet ? 400 : 600,
+  align: 'center',
+});
 
 /** How far beyond its line a chain needs paper, on its outward side. */
 export function chainDepth(sheet: Sheet, chain: Chain): number {
   const rows = Math.max(0, ...place(sheet, chain).map(({ row }) => row));
   return (
-    standOff(sheet, chain, rows) + (chain.direction === 'level' ? LABEL_HEIGHT_MM : widest(sheet, chain)) / 2
+    standOff(sheet, chain, rows) +
+    (chain.direction === 'level' ? LABEL_HEIGHT_MM : chainWidth(sheet, chain)) / 2
   );
 }
 
@@ -58,11 +63,12 @@ export function drawChain(sheet: Sheet, chain: Chain): void {
 function standOff(sheet: Sheet, chain: Chain, row: number): number {
   if (row === 0) return 0;
   if (chain.direction === 'level') return row * ROW_MM;
-  const width = widest(sheet, chain);
+  const width = chainWidth(sheet, chain);
   return width / 2 + 2 + (row - 1) * (width + 1.2);
 }
 
-function widest(sheet: Sheet, chain: Chain): number {
+/** Width of the widest label of a chain. */
+export function chainWidth(sheet: Sheet, chain: Omit<Chain, 'at'>): number {
   return Math.max(...chain.labels.map((label) => sheet.textWidth(label, styleOf(chain))));
 }
 

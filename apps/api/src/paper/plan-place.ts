@@ -1,23 +1,39 @@
-import type { CushionEdge } from '@settlewright/geometry';
+import type { CushionEdge, OutlineCorner, Point2 } from '@settlewright/geometry';
+
 /** A cushion laid flat, in real millimetres. Page left and right, since the paper is read that way. */
 export interface CushionPlan {
+  /** Of the plain rectangle that buttons are measured in. */
   widthMm: number;
   depthMm: number;
+  /** Seam to seam, y up the page; may stand out of that rectangle. */
+  outline: readonly OutlineCorner[];
   /** Distances of the button columns from the seam on the datum side, rising. */
   columnsMm: readonly number[];
   /** Distances of the button rows from the back seam, rising. */
   rowsMm: readonly number[];
+  /** Where the buttons stand, y up the page. */
+  buttons: readonly Point2[];
   /** The side of the page the columns are measured from. */
   datum: 'left' | 'right';
   /** Board joints under the cushion, measured like the columns. */
   boardLinesMm: readonly number[];
   wall: { side: 'left' | 'right'; gapMm: number; columnsMm: readonly number[]; name: string } | null;
-  closure: { edge: CushionEdge; wrapMm: number; words: string } | null;
+  /** Along its edge and round both ends. */
+  closure: { edge: CushionEdge; path: readonly Point2[]; wrapMm: number; words: string } | null;
   edges: { back: string; front: string; left: string; right: string };
+  cloth: ClothWay | null;
+}
+
+/** How the cloth lies on a cushion. */
+export interface ClothWay {
+  direction: 'up-roll' | 'railroad' | 'either';
+  words: string;
+  /** Where the pile runs, on the page. */
+  nap: 'none' | 'up' | 'down' | 'left' | 'right';
 }
 
 export interface PlanPlace {
-  /** Top left corner of the cushion on the paper. */
+  /** Top left corner of the box round the outline, on the paper. */
   x: number;
   y: number;
   /** Paper millimetres for a real one. */
@@ -27,8 +43,24 @@ export interface PlanPlace {
   stepMm: number;
 }
 
-/** Paper that the upright chains, the wall and the lower chain need around the cushion itself. */
-export const PLAN_SPACE = { chains: 20, wall: 17, bottom: 11 } as const;
+/** The box round the outline of a plan, y up the page. */
+export interface PlanBox {
+  x0: number;
+  x1: number;
+  y0: number;
+  y1: number;
+}
+
+export function planBox({ outline }: Pick<CushionPlan, 'outline'>): PlanBox {
+  const [xs, ys] = [outline.map(({ at }) => at[0]), outline.map(({ at }) => at[1])];
+  return { x0: Math.min(...xs), x1: Math.max(...xs), y0: Math.min(...ys), y1: Math.max(...ys) };
+}
+
+/** From the plan to the paper. */
+export function onPaper(plan: CushionPlan, { x, y, factor }: PlanPlace): (point: Point2) => Point2 {
+  const { x0, y1 } = planBox(plan);
+  return ([px, py]) => [x + (px - x0) * factor, y + (y1 - py) * factor];
+}
 
 /** The side that the upright chains stand on: away from the wall. */
 export function chainSide(plan: Pick<CushionPlan, 'wall'>): 'left' | 'right' {

@@ -3,7 +3,7 @@ import { type Weight, useFace } from './lettering/faces';
 import { printable, ROMANISED } from './lettering/printable';
 import { type Direction, runWidth, textRuns } from './lettering/text-runs';
 
-const MM_PER_POINT = 25.4 / 72;
+export const MM_PER_POINT = 25.4 / 72;
 
 /** Line weights in millimetres, from guide line to what a section cuts. */
 export const PEN = { hair: 0.14, fine: 0.18, edge: 0.36, frame: 0.42, cut: 0.8 } as const;

@@ -1,5 +1,7 @@
-import type { CushionEdge, Drawing, LengthStyle } from '@settlewright/geometry';
+import type { CushionEdge, Drawing, LengthStyle, OrderModel, ScheduleRow } from '@settlewright/geometry';
+import type { ClothOnPaper } from './cloth-sheets';
 import type { Paper } from './pack';
+import type { ClothWay } from './plan-place';
 
 export interface Size {
   widthMm: number;
@@ -35,6 +37,8 @@ interface ButtonPlan {
 
 /** Cushions that are made alike, as the sheets show them. */
 export interface SpecCushion {
+  /** As the order has them. */
+  row: ScheduleRow;
   marks: readonly string[];
   /** Marks of the benches, in the order of the cushions. */
   benches: readonly string[];
@@ -64,6 +68,8 @@ export interface SpecCushion {
   edges: { back: string; front: string; left: string; right: string };
   /** What each edge meets, in one sentence. */
   meets: string;
+  /** How the cloth of its faces lies; nothing when no cloth was said. */
+  cloth: ClothWay | null;
   /** Why it cannot be made as asked; empty where it can. */
   faults: readonly string[];
 }
@@ -80,17 +86,47 @@ interface SpecWords {
   flammability: string;
 }
 
-/** Everything on the sheets. Holds nobody who sits, and no body. */
-export interface SpecPack {
+/** Words on the bag of one cushion. */
+export interface BagLabel {
+  mark: string;
+  /** "B1, seat 1 of 2 from the left, seen from in front". */
+  place: string;
+  hand: string;
+  number: number;
+  count: number;
+}
+
+/** Everything on the sheets but for the layouts of its cloths. Holds nobody who sits, and no body. */
+export interface SpecPackData {
   paper: Paper;
   units: LengthStyle;
   production: string;
   set: string;
   workshop: { name: string; telephone: string };
-  order: { number: number; title: string; neededBy: string | null; upholsterer: string | null };
+  order: {
+    number: number;
+    title: string;
+    neededBy: string | null;
+    upholsterer: string | null;
+    /** For members; nothing secret is in it. */
+    pageUrl: string;
+  };
   revision: { letter: string; issuedAt: Date; issuedOn: string; issuedBy: string; note: string };
   words: SpecWords;
+  /** How far a finished size may be off. */
+  toleranceMm: number;
+  model: OrderModel;
+  /** Names of cloths of which nothing was said but the name. */
+  assumedCloths: readonly string[];
   cushions: readonly SpecCushion[];
+  labels: readonly BagLabel[];
   plan: Drawing;
+  /** The benches of the order from above and one side. */
+  picture: Drawing;
   sections: readonly { bench: string; drawing: Drawing }[];
+}
+
+/** The same with its cloths laid. */
+export interface SpecPack extends SpecPackData {
+  cloths: readonly ClothOnPaper[];
 }

@@ -1,11 +1,18 @@
+import { drawButtonSheets } from './button-sheets';
+import { drawClothSheets } from './cloth-sheets';
 import { drawCushionSheet } from './cushion-sheet';
+import { drawLabels } from './label-sheets';
+import { OrderPages } from './order-pages';
 import { drawOverview } from './overview-sheet';
 import { Pack } from './pack';
-import type { SpecCushion, SpecPack } from './spec-pack';
-import { handWords, marksWords } from './spec-words';
+import type { SpecPack } from './spec-pack';
+import { drawTemplates } from './template-sheets';
 import { drawFrame, type TitleCell } from './title-block';
 
-/** The drawing pack of a cushion order: an overview, then one sheet for each make of cushion. */
+/**
+ * The paper of a cushion order: the order as a whole, one sheet for each make of cushion, buttons, cloths on their rolls,
+ * templates at full size, labels.
+ */
 export function specPdf(pack: SpecPack): Buffer {
   const pdf = new Pack({
     paper: pack.paper,
@@ -14,29 +21,24 @@ export function specPdf(pack: SpecPack): Buffer {
     subject: `${pack.production}, ${pack.set}`,
     issuedAt: pack.revision.issuedAt,
   });
-  drawOverview(pdf, pack);
-  const opening = pdf.sheetCount;
-  for (const cushion of pack.cushions) drawCushionSheet(pdf.addSheet(), pack, cushion);
+  const pages = new OrderPages(pdf);
+  drawOverview(pages, pack);
+  for (const cushion of pack.cushions) drawCushionSheet(pages, pack, cushion);
+  drawButtonSheets(pages, pack);
+  drawClothSheets(pages, pack);
+  drawTemplates(pages, pack);
+  drawLabels(pages, pack);
   pdf.eachSheet((sheet, number, count) => {
-    drawFrame(sheet, titleCells(pack, pack.cushions[number - opening - 1], number, count));
+    drawFrame(sheet, titleCells(pack, pages.topicOf(number), number, count));
   });
   return pdf.bytes();
 }
 
-function titleCells(
-  pack: SpecPack,
-  cushion: SpecCushion | undefined,
-  number: number,
-  count: number,
-): TitleCell[] {
+function titleCells(pack: SpecPack, topic: readonly string[], number: number, count: number): TitleCell[] {
   const { order, revision, workshop } = pack;
-  const all = pack.cushions.flatMap(({ marks }) => marks);
-  const marks = cushion
-    ? [marksWords(cushion.marks), `${cushion.kind}, ${handWords(cushion.hand)}, make ${cushion.marks.length}`]
-    : [marksWords(all), all.length === 1 ? 'one cushion' : `${all.length} cushions`];
   return [
     { label: 'Production, set', lines: [pack.production, pack.set], widthMm: 47 },
-    { label: 'Marks on this sheet', lines: marks, widthMm: 46 },
+    { label: 'On this sheet', lines: topic, widthMm: 46 },
     { label: 'Workshop', lines: [workshop.name, workshop.telephone].filter(Boolean), widthMm: 37 },
     {
       label: 'For',

@@ -23,7 +23,7 @@ export interface Frame {
   bottom: number;
 }
 
-export function frameOf(sheet: Sheet): Frame {
+export function frameOf(sheet: Pick<Sheet, 'widthMm' | 'heightMm'>): Frame {
   return {
     left: MARGIN_MM,
     top: MARGIN_MM,

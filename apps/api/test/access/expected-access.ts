@@ -130,6 +130,8 @@ export const EXPECTED_ACCESS: Record<string, AccessRule> = {
   [`GET ${O}`]: EVERY_MEMBER,
   [`PATCH ${O}`]: MAKERS,
   [`GET ${O}/spec.pdf`]: EVERY_MEMBER,
+  [`GET ${O}/schedule.csv`]: EVERY_MEMBER,
+  [`GET ${O}/panels.dxf`]: EVERY_MEMBER,
   [`POST ${O}/send`]: MAKERS,
   [`POST ${O}/cancel`]: MAKERS,
   [`POST ${O}/state`]: MAKERS,
@@ -156,6 +158,8 @@ export const EXPECTED_ACCESS: Record<string, AccessRule> = {
 
   'GET /link/{token}': LINK,
   'GET /link/{token}/spec.pdf': LINK,
+  'GET /link/{token}/schedule.csv': LINK,
+  'GET /link/{token}/panels.dxf': LINK,
   'POST /link/{token}/acknowledge': LINK,
   'POST /link/{token}/reply': LINK,
   'GET /link/{token}/life': LINK,
