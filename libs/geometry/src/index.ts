@@ -78,6 +78,7 @@ export { cushionRuns, cushionRunsOf, runJointEnds, type CushionRun } from './cus
 export * from './cushions/cushion-choice.ts';
 export { cushionKey, cushionKeyParts } from './cushions/cushion-key.ts';
 export * from './cushions/choice-words.ts';
+export type { CushionWarning } from './cushions/cushion-warning.ts';
 export * from './cushions/cushion-warnings.ts';
 export { foamOfCushion } from './cushions/foam-of-cushion.ts';
 export { plainMake } from './cushions/made-of.ts';

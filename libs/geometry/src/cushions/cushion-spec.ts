@@ -2,7 +2,7 @@ import type { OutlineCorner } from '../outlines/outline.ts';
 import type { Foam } from '../room/document.ts';
 import type { CushionEdge, HoldDown } from './cushion-choice.ts';
 import type { CushionSize } from './cushion-sizes.ts';
-import type { CushionWarning } from './cushion-warnings.ts';
+import type { CushionWarning } from './cushion-warning.ts';
 import type { CushionMake } from './making/cushion-make.ts';
 import type { CushionPanels } from './making/cut-panels.ts';
 import type { TuftingKind } from './tufting-choice.ts';

@@ -1,17 +1,11 @@
 import { outlinePoints, type OutlineCorner, type Point2 } from '../outlines/outline.ts';
 import { formatLength } from '../units/format-length.ts';
 import type { LengthStyle } from '../units/length-style.ts';
-import type { CushionEdge } from './cushion-choice.ts';
 import type { ButtonTable, CushionSpec } from './cushion-spec.ts';
+import type { CushionWarning } from './cushion-warning.ts';
 
 /** A column may stand off its joint by so much: 1/8 in, trade practice, from memory. */
 export const OFF_JOINT_MM = 3.175;
-
-/** Something that can be made, and that somebody should look at first. */
-export type CushionWarning =
-  | { code: 'off-joint'; columns: number; furthestMm: number }
-  | { code: 'buttons-outside'; count: number }
-  | { code: 'closure-on-camera-side'; edge: CushionEdge };
 
 /** Where each button stands on the plan: back edge up, sitter's left at the right, from the lower left corner. */
 export function buttonSpots(spec: Pick<CushionSpec, 'buttons' | 'datum' | 'finishedMm'>): Point2[] {

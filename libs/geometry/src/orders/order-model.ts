@@ -1,5 +1,6 @@
 import type { ButtonColumn, CushionDatum, CushionGroup, CushionSpec } from '../cushions/cushion-spec.ts';
-import { OFF_JOINT_MM, type CushionWarning } from '../cushions/cushion-warnings.ts';
+import type { CushionWarning } from '../cushions/cushion-warning.ts';
+import { OFF_JOINT_MM } from '../cushions/cushion-warnings.ts';
 import { foamOfCushion } from '../cushions/foam-of-cushion.ts';
 import { groupCushions } from '../cushions/group-cushions.ts';
 import { keptCushionRules, type CushionRules } from '../cushions/workshop-cushions.ts';

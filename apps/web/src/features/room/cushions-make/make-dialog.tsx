@@ -47,7 +47,7 @@ export default function MakeDialog({ piece: opened, actions, onClose }: MakeDial
         <p>{opened.mark} has no cushions now.</p>
       ) : (
         <div className="grid gap-6 tablet:grid-cols-2">
-          <div className="grid content-start gap-4">
+          <div className="grid content-start gap-4 self-start tablet:sticky tablet:top-4">
             <Select
               label="Cushion"
               value={spec.key}
