@@ -10,13 +10,13 @@ const ROUND_MM = 20;
 const CROWN_MM = 9;
 const CROWN_RUN_MM = 150;
 /** Distances of the lines of a panel: close where somebody sits or leans on it and down a curve, mm. */
-const PRESSED_STEP_MM = 32;
-const LEANED_STEP_MM = 48;
+const PRESSED_STEP_MM = 56;
+const LEANED_STEP_MM = 100;
 const CURVED_STEP_MM = 26;
 const FREE_STEP_MM = 240;
 /** A pressed panel stays so far over the deck, mm. */
 const LEAST_MM = 8;
-const ROUNDING = [1, 0.92, 0.6, 0] as const;
+const ROUNDING = [1, 0.75, 0] as const;
 
 type Sheet = Vec3[][];
 
@@ -53,18 +53,22 @@ function normalsOf(sheet: Sheet): Sheet {
 const CORNERS = [0, 0, 1, 0, 1, 1, 0, 0, 1, 1, 0, 1] as const;
 
 /** Made anew for each frame of a pull: plain loops, as lists and spreads cost ten times as much. */
+/** Its outline is drawn round the edges alone: inside them a panel is never seen against anything but itself. */
 function addSheet(out: SolidSink, sheet: Sheet, normals: Sheet, material: number) {
   const { positions, normals: facing, materials, roundPositions, roundNormals } = out;
   for (let row = 0; row + 1 < sheet.length; row++) {
-    for (let column = 0; column + 1 < sheet[row]!.length; column++) {
+    const width = sheet[row]!.length;
+    for (let column = 0; column + 1 < width; column++) {
+      const border = Math.min(row, column, sheet.length - 2 - row, width - 2 - column) < ROUNDING.length;
       for (let n = 0; n < CORNERS.length; n += 2) {
         const [r, c] = [row + CORNERS[n]!, column + CORNERS[n + 1]!];
         const [at, normal] = [sheet[r]![c]!, normals[r]![c]!];
         positions.push(at[0], at[1], at[2]);
         facing.push(normal[0], normal[1], normal[2]);
+        materials.push(material);
+        if (!border) continue;
         roundPositions.push(at[0], at[1], at[2]);
         roundNormals.push(normal[0], normal[1], normal[2]);
-        materials.push(material);
       }
     }
   }
