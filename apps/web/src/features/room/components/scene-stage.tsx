@@ -25,6 +25,7 @@ import { LensMask } from '../views/lens-mask.tsx';
 import { LensOnPlan } from '../views/lens-on-plan.tsx';
 import { useOfferPresentView, useSeen } from '../views/use-seen.ts';
 import { viewTitle } from '../views/view-title.ts';
+import { useHandForm } from '../together/hand-form.ts';
 import { HiddenNote } from '../together/hidden-note.tsx';
 import { TapeBar } from '../tape-tool/tape-bar.tsx';
 import { linesOnScene, useMeasures, useMeasuringScene } from '../tape-tool/use-measuring.ts';
@@ -74,7 +75,9 @@ export function SceneStage({ picture, piece, address, actions, several, onOpenCe
   const { letter } = seen;
   const [showBodies, showTapes] = [seen.bodies.shown, seen.tapes.shown];
   const settled = maker.picture(useRoom(settledDocument));
-  const view = useView(settled, letter, address.pieceId, sheet, seen);
+  // What a form proposes is seen whole before it is taken.
+  const proposed = useHandForm((state) => state.open !== undefined);
+  const view = useView(proposed ? picture : settled, letter, address.pieceId, sheet, seen);
   useOfferPresentView(seen, view, clientView);
   const title = viewTitle(seen, style);
   const hand = useSceneHand({

@@ -19,6 +19,7 @@ import { keepFile } from '@/lib/download.ts';
 import { Toggle } from '../components/toggle.tsx';
 import { usePicture, useSurroundings } from '../room-context.tsx';
 import { readPalette } from '../scene/palette.ts';
+import { sectionPlaneNow } from '../section/section-store.ts';
 import { shotSize } from '../views/view-shot.tsx';
 import { useShots } from '../views/use-shots.tsx';
 import { aboutView } from '../views/view-title.ts';
@@ -65,15 +66,17 @@ const PRINT_PX = 2400;
 
 /** Saves a plan, an elevation, a section, the scene or its model as a file; all of it is made in the browser. */
 export default function SaveDrawing({ onClose }: { onClose: () => void }) {
-  const { setName, style, issued } = useSurroundings();
+  const { path, setName, style, issued } = useSurroundings();
   const picture = usePicture();
   const { document: set, parts } = picture;
   const { shoot, stage } = useShots(picture);
   const named = set.views ?? [];
   const [kind, setKind] = useState<FileKind>('pdf');
-  const [direction, setDirection] = useState<ViewDirection>('above');
-  const [isCut, setIsCut] = useState(false);
-  const [cut, setCut] = useState<QuantityEntry>(() => entryOf(usualCut(set, 'above')));
+  // Where a cut is shown, the drawing begins with that one.
+  const [shownCut] = useState(() => sectionPlaneNow(path.setId));
+  const [direction, setDirection] = useState<ViewDirection>(shownCut?.direction ?? 'above');
+  const [isCut, setIsCut] = useState(shownCut !== undefined);
+  const [cut, setCut] = useState<QuantityEntry>(() => entryOf(shownCut?.atMm ?? usualCut(set, direction)));
   const [dashed, setDashed] = useState(false);
   const [scale, setScale] = useState(() => usualScale(style.system));
   const [paper, setPaper] = useState<PaperKey>(style.system === 'millimetres' ? 'a4' : 'letter');
