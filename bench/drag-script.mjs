@@ -15,24 +15,42 @@ const middleOf = ({ x, y, width, height }) => ({ x: x + width / 2, y: y + height
 const grip = (page, name) =>
   page.getByRole('button', { name: new RegExp(`^Bench .*${name}.*arrows change it$`) });
 
-/** Where the selected bench can be taken hold of on the plan: between its ends, and under no button. */
-async function bareSpot(page) {
+/** Takes hold of the selected bench on the plan, wherever it can be had, and carries it. */
+async function carry(page) {
   const [left, right] = await Promise.all(
     ['length, left end', 'length, right end'].map(async (end) =>
       middleOf(await grip(page, end).boundingBox()),
     ),
   );
-  for (let share = 0.1; share < 0.9; share += 0.01) {
-    const [x, y] = [left.x + (right.x - left.x) * share, left.y + (right.y - left.y) * share];
-    const bare = await page.evaluate(
-      ([x, y]) =>
-        !document.elementFromPoint(x, y)?.closest('button') &&
-        !!document.elementFromPoint(x, y)?.closest('[data-scene]'),
-      [x, y],
-    );
-    if (bare) return { x, y };
+  for (const asideShare of [0.1, 0.2, 0.3, 0.4]) {
+    for (const byPx of [-20, -40, -60, -80]) {
+      const x = left.x + (right.x - left.x) * asideShare;
+      const spot = { x, y: (left.y + right.y) / 2 + byPx };
+      if (await isTaken(page, spot)) return dragFrom(page, spot);
+    }
   }
-  throw new Error('The bench is covered by buttons.');
+  throw new Error('The bench cannot be taken hold of.');
+}
+
+/** Whether a press there takes the bench, and not the sheet; what it moved is put back. */
+async function isTaken(page, { x, y }) {
+  const bare = await page.evaluate(
+    ([x, y]) => {
+      const there = document.elementFromPoint(x, y);
+      return !there?.closest('button') && !!there?.closest('[data-scene]');
+    },
+    [x, y],
+  );
+  if (!bare) return false;
+  await page.mouse.move(x, y);
+  await page.mouse.down();
+  await page.mouse.move(x + 10, y + 10);
+  await page.waitForTimeout(50);
+  const taken = await page.evaluate(() => document.querySelector('[aria-busy="true"]') !== null);
+  await page.mouse.move(x, y);
+  await page.keyboard.press('Escape');
+  await page.mouse.up();
+  return taken;
 }
 
 export async function run() {
@@ -70,7 +88,7 @@ export async function run() {
   await end.waitFor();
   const pulled = await dragFrom(page, middleOf(await end.boundingBox()));
   await page.waitForTimeout(PAUSE_MS);
-  const carried = await dragFrom(page, await bareSpot(page));
+  const carried = await carry(page);
   await browser.close();
   await product.close();
   return [
