@@ -4,6 +4,7 @@ import { Dialog } from '@/components/dialog.tsx';
 import { Disclosure } from '@/components/disclosure.tsx';
 import { Notice } from '@/components/notice.tsx';
 import { Select } from '@/components/select.tsx';
+import { capital } from '@/lib/capital.ts';
 import { useCushionRules } from '@/lib/cushion-settings.ts';
 import { useFormat } from '@/lib/format.ts';
 import type { PieceActions } from '../hooks/use-piece-actions.ts';
@@ -59,8 +60,8 @@ export default function MakeDialog({ piece: opened, actions, onClose }: MakeDial
             />
             <PlanPicture spec={spec} />
             <p className="text-sm text-ink-2">
-              Finished, seam to seam. {makeWords(spec.make, spec.kind)}. Thick line: closure; dashes: seen by
-              the camera.
+              Finished, seam to seam. {capital(makeWords(spec.make, spec.kind))}. Thick line: closure; dashes:
+              seen by the camera.
             </p>
             {spec.faults.length > 0 && (
               <Notice tone="wont">It cannot be made so: {spec.faults.join('; ')}.</Notice>

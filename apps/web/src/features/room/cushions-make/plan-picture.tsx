@@ -58,8 +58,10 @@ export function PlanPicture({ spec }: { spec: CushionSpec }) {
         const length = Math.hypot(to[0] - from[0], to[1] - from[1]);
         const out: Point2 = [(to[1] - from[1]) / length, -(to[0] - from[0]) / length];
         const upright = Math.abs(out[0]) > 0.7;
+        // In a notch there is no room for two numbers: the upright one of a short edge stands within the cushion.
+        const aside = !upright ? 1.4 : length < 3 * size ? -1 : 1;
         const [x, y] = [
-          (from[0] + to[0]) / 2 + out[0] * (upright ? 1 : 1.4) * size,
+          (from[0] + to[0]) / 2 + out[0] * aside * size,
           (from[1] + to[1]) / 2 + out[1] * 1.4 * size,
         ];
         return (
