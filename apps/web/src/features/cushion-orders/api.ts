@@ -54,6 +54,7 @@ export interface OrderInput {
   neededBy: string | null;
   cushionMarks: string[] | null;
   spec: OrderSpec;
+  toleranceMm: number;
 }
 
 export const useChangeOrder = (path: OrderPath) =>

@@ -83,6 +83,8 @@ export interface Order {
   upholsterer: { id: string; name: string; contactName: string; removed: boolean } | null;
   openQuestions: number;
   spec: OrderSpec;
+  /** How far a finished size may be off. */
+  toleranceMm: number;
   cushions: CushionSpec[];
   sent: { revisionLetter: string; at: string; byName: string; changedSince: boolean } | null;
   acknowledgement: Acknowledgement | null;

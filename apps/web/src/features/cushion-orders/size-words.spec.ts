@@ -9,8 +9,9 @@ const FOAM = { grade: 'HR', densityKgM3: 40, ifd25N: 160, supportFactor: 2.6 };
 
 describe('what an upholsterer reads beside a size', () => {
   it('follows the units of the page', () => {
-    expect(plain(toleranceText(MM))).toBe('± 6 mm');
-    expect(toleranceText(INCHES)).toBe('± ¼″');
+    expect(plain(toleranceText(6.35, MM))).toBe('± 6 mm');
+    expect(toleranceText(6.35, INCHES)).toBe('± ¼″');
+    expect(toleranceText(3.175, INCHES)).toBe('± ⅛″');
     expect(plain(foamText(FOAM, MM))).toBe('HR, 40 kg/m³, firmness 160 N (25 % IFD)');
     expect(plain(foamText(FOAM, INCHES))).toBe('HR, 2.5 lb/ft³, firmness 36 lb (25 % IFD)');
   });

@@ -5,16 +5,14 @@ const NEWTON_PER_LBF = 4.4482216;
 const MM_PER_YARD = 914.4;
 const MM_PER_METRE = 1000;
 
-const TOLERANCE: Record<LengthStyle['system'], string> = {
-  'feet-inches': '± ¼″',
-  'decimal-inches': '± 0.25″',
-  millimetres: '± 6\u202fmm',
-};
+/** A quarter of an inch either way, unless the order says otherwise. */
+export const USUAL_TOLERANCE_MM = 6.35;
 
 const isMetric = ({ system }: LengthStyle) => system === 'millimetres';
 
-/** How far a finished size may be off. */
-export const toleranceText = ({ system }: LengthStyle): string => TOLERANCE[system];
+/** How far a finished size may be off: "± ¼″". */
+export const toleranceText = (toleranceMm: number, style: LengthStyle): string =>
+  `± ${formatLength(toleranceMm, { ...style, feet: false })}`;
 
 /** Three sizes with the unit once at the end, each as text of its own. */
 export function sizeTexts(

@@ -13,7 +13,14 @@ import { MarkTag } from '@/components/mark-tag.tsx';
 import { Measure } from '@/components/measure.tsx';
 import { useFormat } from '@/lib/format.ts';
 import type { OrderSpec } from '../order.ts';
-import { foamText, otherSystem, runText, sizeTexts, toleranceText } from '../size-words.ts';
+import {
+  foamText,
+  otherSystem,
+  runText,
+  sizeTexts,
+  toleranceText,
+  USUAL_TOLERANCE_MM,
+} from '../size-words.ts';
 import { CushionDrawing } from './cushion-drawing.tsx';
 
 const HAND_WORDS: Record<CushionSpec['hand'], string> = {
@@ -123,7 +130,12 @@ function Facts({ spec, words }: { spec: CushionSpec; words: OrderSpec }) {
 /** Length that a number takes on the plan, for a plan about as wide as the column. */
 const NUMBER_OF_WIDTH = 0.1;
 
-function Group({ group, words }: { group: CushionGroup; words: OrderSpec }) {
+interface GroupsProps {
+  words: OrderSpec;
+  toleranceMm?: number;
+}
+
+function Group({ group, words, toleranceMm = USUAL_TOLERANCE_MM }: GroupsProps & { group: CushionGroup }) {
   const { spec, marks, mirroredMarks } = group;
   const { style } = useFormat();
   const { widthMm, depthMm } = spec.finishedMm;
@@ -150,7 +162,8 @@ function Group({ group, words }: { group: CushionGroup; words: OrderSpec }) {
           </p>
           <p className="text-sm text-ink-2">
             Finished, seam to seam. <Measure text={other.join(' × ')} />,{' '}
-            <Measure text={toleranceText(style)} />. {seat ? 'Seat' : 'Back'} of {spec.benchMark}.
+            <Measure text={toleranceText(toleranceMm, style)} />. {seat ? 'Seat' : 'Back'} of {spec.benchMark}
+            .
           </p>
           {mirroredMarks.length > 0 && (
             <p className="mt-2 text-sm text-ink-2">{mirroredMarks.join(', ')}: the same, mirrored.</p>
@@ -184,7 +197,7 @@ function Group({ group, words }: { group: CushionGroup; words: OrderSpec }) {
 }
 
 /** Every distinct cushion of an order with its sizes and drawings. */
-export function CushionGroups({ cushions, words }: { cushions: readonly CushionSpec[]; words: OrderSpec }) {
+export function CushionGroups({ cushions, ...rest }: GroupsProps & { cushions: readonly CushionSpec[] }) {
   const groups = useMemo(() => groupCushions(cushions), [cushions]);
   if (groups.length === 0) {
     return (
@@ -193,5 +206,5 @@ export function CushionGroups({ cushions, words }: { cushions: readonly CushionS
       </p>
     );
   }
-  return groups.map((group) => <Group key={group.marks.join()} group={group} words={words} />);
+  return groups.map((group) => <Group key={group.marks.join()} group={group} {...rest} />);
 }

@@ -14,8 +14,9 @@ import { useWorkshop } from '@/lib/workshop.ts';
 import { orderAddress, useOrder, type OrderPath } from '../api.ts';
 import type { Order } from '../order.ts';
 import { CushionGroups } from './cushion-groups.tsx';
-import { ChangeOrderDialog, RecordStateDialog, SendOrderDialog } from './order-dialogs.tsx';
+import { ChangeOrderDialog, RecordStateDialog } from './order-dialogs.tsx';
 import { OrderSide } from './order-side.tsx';
+import { SendOrderDialog } from './send-order-dialog.tsx';
 
 function Opened({ path, order }: { path: OrderPath; order: Order }) {
   const { canEdit } = useWorkshop();
@@ -97,7 +98,7 @@ function Opened({ path, order }: { path: OrderPath; order: Order }) {
       </div>
       <div className="grid gap-10 desk:grid-cols-[minmax(0,1fr)_20rem]">
         <div className="min-w-0">
-          <CushionGroups cushions={order.cushions} words={order.spec} />
+          <CushionGroups cushions={order.cushions} words={order.spec} toleranceMm={order.toleranceMm} />
           {order.spec.notes !== '' && (
             <p className="mb-3 max-w-text whitespace-pre-line">
               <b className="font-semibold">Notes.</b> {order.spec.notes}

@@ -63,7 +63,7 @@ function Opened({ token, order }: { token: string; order: PublicOrder }) {
           </Fact>
         </dl>
         {life.data && <Changes life={life.data} revisionLetter={order.revisionLetter} />}
-        <CushionGroups cushions={order.cushions} words={order.spec} />
+        <CushionGroups cushions={order.cushions} words={order.spec} toleranceMm={life.data?.toleranceMm} />
         {order.spec.notes !== '' && <p className="mb-3 max-w-text whitespace-pre-line">{order.spec.notes}</p>}
         {order.spec.flammability !== '' && (
           <p className="max-w-text text-sm text-ink-2">

@@ -44,6 +44,7 @@ export const ORDER: Order = {
   upholsterer: null,
   openQuestions: 0,
   spec: SPEC,
+  toleranceMm: 6.35,
   cushions: CUSHIONS,
   sent: null,
   acknowledgement: null,
