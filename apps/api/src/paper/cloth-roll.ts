@@ -7,6 +7,7 @@ import {
   type PlacedPanel,
 } from '@settlewright/geometry';
 import { PEN, type Point, type Sheet } from './sheet';
+import { TakenSpace, wordsBox } from './taken-space';
 
 /** A roll with the panels on it. */
 export interface Roll {
@@ -19,12 +20,15 @@ export interface Roll {
 /** Paper over and under a strip of the roll: words and the rule. */
 const OVER_MM = 7;
 const UNDER_MM = 6;
-/** Two strips to a sheet at the least, so that narrow panels can still be named. */
-const MOST_WIDTH_MM = 69;
+/** Two strips to a sheet, as large as that allows: narrow panels are still to be named. */
+const MOST_WIDTH_MM = 58;
 /** More strips than this are not read: the roll is drawn smaller. */
 const MOST_STRIPS = 8;
 /** Real millimetres for one of the paper. */
 const SCALES = [10, 15, 20, 25, 30, 40, 50, 75, 100];
+
+/** Where along a panel its name may stand. */
+const SHARES = [0.5, 0.38, 0.62, 0.26, 0.74, 0.14, 0.86];
 
 interface RollScale {
   ratio: number;
@@ -88,6 +92,7 @@ export function drawRoll(
   const show = (mm: number) => formatLength(mm, { ...units, feet: false });
   const start = n === 0 ? 'from the start of the roll' : `from ${show(from)}`;
   sheet.text(`${start} to ${show(to)}, 1 : ${ratio}`, at.x, top - 1.6);
+  const taken = new TakenSpace();
   drawRepeats(sheet, roll, { from, to, x, top, high, y });
   layout.placed.forEach((panel, index) => {
     const [a, b] = [panel.yMm + cloth.startMm, panel.yMm + panel.lengthMm + cloth.startMm];
@@ -96,7 +101,7 @@ export function drawRoll(
     sheet.rect(box.x0, box.y0, box.x1 - box.x0, box.y1 - box.y0, { pen: PEN.fine, fill: 244 });
     drawControl(sheet, roll, panel, { x, y, from, to });
     if ((a + b) / 2 < from || (a + b) / 2 >= to) return;
-    drawPanelWords(sheet, panel, labelOf(sheet, panel, index, ratio).text, box);
+    drawPanelWords(sheet, panel, labelOf(sheet, panel, index, ratio).text, box, taken);
   });
   // The roll itself last, so that its edges are whole; where a strip goes on there is no edge.
   sheet.line(at.x, top, x(to), top, { pen: PEN.edge });
@@ -158,18 +163,29 @@ function drawControl(sheet: Sheet, { panels, cloth }: Roll, placed: PlacedPanel,
   sheet.line(x, y - 1.6, x, y + 1.6, { pen: PEN.edge });
 }
 
+/** A name or number in its panel: in the middle, or along it where neighbours are so narrow that theirs would touch. */
 function drawPanelWords(
   sheet: Sheet,
   panel: PlacedPanel,
   text: string,
   box: { x0: number; x1: number; y0: number; y1: number },
+  taken: TakenSpace,
 ): void {
-  const [x, y] = [(box.x0 + box.x1) / 2, (box.y0 + box.y1) / 2];
   const [long, high] = [box.x1 - box.x0, box.y1 - box.y0];
   const size = Math.min(long, high) > 3.4 ? 9 : 7;
   const width = sheet.textWidth(text, { size });
-  if (width + 1 < long) sheet.text(text, x - 1.5, y + size * 0.128, { align: 'center', size });
-  else sheet.text(text, x + size * 0.128, y, { align: 'center', angleDeg: 90, size });
+  const style = { align: 'center' as const, size, ...(width + 1 >= long && { angleDeg: 90 }) };
+  const down = size * 0.128;
+  const places = SHARES.map((share): Point =>
+    style.angleDeg
+      ? [(box.x0 + box.x1) / 2 + down, box.y0 + share * high]
+      : [box.x0 + share * long - 1.5, (box.y0 + box.y1) / 2 + down],
+  );
+  const place = places.find((at) => taken.isFree(wordsBox(sheet, text, ...at, style)));
+  if (!place) return;
+  taken.take(wordsBox(sheet, text, ...place, style));
+  sheet.text(text, ...place, style);
+  const [x, y] = style.angleDeg ? [place[0] - down, place[1]] : [place[0] + 1.5, place[1] - down];
   // The panel's own up.
   const tip: Point = panel.railroaded ? [x + width / 2 + 2, y - 1.6] : [x + width / 2 + 3.6, y];
   const [dx, dy] = panel.railroaded ? [0, -1] : [1, 0];

@@ -7,6 +7,7 @@ import {
 } from '@settlewright/geometry';
 import { drawClothWay } from './cloth-way';
 import { drawChains, type PlanChains } from './cushion-chains';
+import { MOST_CHAINED_CORNERS } from './outline-stops';
 import { type CushionPlan, onPaper, planBox, type PlanPlace } from './plan-place';
 import { PEN, type Sheet } from './sheet';
 import { TakenSpace, type WordPlace } from './taken-space';
@@ -56,6 +57,8 @@ function drawBoardLines(figure: Figure): void {
   const box = boxOnPaper(figure);
   for (const line of plan.boardLinesMm) {
     const [x] = at([plan.datum === 'left' ? line : plan.widthMm - line, 0]);
+    // What was drawn freely may be smaller than its place.
+    if (x < box.x || x > box.x + box.width) continue;
     sheet.line(x, box.y - 1.8, x, box.y + box.height + 1.8, { pen: PEN.hair, dash: [1.3, 0.9], grey: 110 });
   }
 }
@@ -154,8 +157,9 @@ function crossings({ plan, at }: Figure, axis: 'x' | 'y', value: number): [numbe
   return met.length < 2 ? undefined : [Math.min(...met), Math.max(...met)];
 }
 
-/** Radii of round corners, each inside its corner; equal ones that find no room stand in the template's table. */
+/** Radii of round corners, each inside its corner; all of them stand in the template's table too. */
 function nameRadii({ sheet, plan, place, at, taken }: Figure): void {
+  if (plan.outline.length > MOST_CHAINED_CORNERS) return;
   const box = planBox(plan);
   const middle = at([(box.x0 + box.x1) / 2, (box.y0 + box.y1) / 2]);
   for (const { at: corner, radiusMm } of plan.outline) {

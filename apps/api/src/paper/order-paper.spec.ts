@@ -17,6 +17,8 @@ import { paperText, paperWords, type PlacedWord } from '../../test/factories/pap
 import { laidSpecPdf } from './laid-pack';
 import type { SpecPackData } from './spec-pack';
 import { SpecPress } from './spec-press';
+import { tileSpace } from './template-sheets';
+import { templateLines, templateTiles } from './template-tiles';
 
 const TRIES = 40;
 const inches = (mm: number) => formatLength(mm, INCHES);
@@ -32,8 +34,8 @@ function wavy(): SetDocument {
       edge: 'front' as const,
     })),
     { xMm: 705, yMm: 0, radiusMm: 0, edge: 'left' as const },
-    { xMm: 705, yMm: 150, radiusMm: 20, edge: 'back' as const },
-    { xMm: 0, yMm: 150, radiusMm: 20, edge: 'right' as const },
+    { xMm: 705, yMm: 120, radiusMm: 20, edge: 'back' as const },
+    { xMm: 0, yMm: 120, radiusMm: 20, edge: 'right' as const },
   ];
   return chosen(arrangement('facing-benches'), 'C1', { shape: { drawn } });
 }
@@ -44,7 +46,7 @@ function fourteenButtons(): SetDocument {
   for (const piece of document.pieces) {
     if (piece.kind !== 'bench') continue;
     piece.upholstery.buttons = { rows: 3, everyBoards: 1, alignTo: 'joints', on: 'back' };
-    piece.lengthMm = 15.5 * (piece.boards.faceMm + piece.boards.revealMm);
+    piece.lengthMm = 16.5 * (piece.boards.faceMm + piece.boards.revealMm);
     piece.upholstery.longestCushionMm = 3000;
   }
   return document;
@@ -80,11 +82,19 @@ describe('the paper of an order', () => {
 
   for (const paper of ['a4', 'letter'] as const) {
     it.each(sets)(`%s has no word on another, on ${paper}`, async (_, document) => {
-      const words = await paperWords(laidSpecPdf(orderPack(document(), { paper }), TRIES));
+      const data = orderPack(document(), { paper });
+      const words = await paperWords(laidSpecPdf(data, TRIES));
       expect(words.length).toBeGreaterThan(300);
       expect(overlaps(words)).toEqual([]);
     });
   }
+
+  it('has the sets that it is looked at with', () => {
+    expect(orderPack(fourteenButtons()).model.buttons[0]!.columns).toHaveLength(14);
+    const outline = orderPack(wavy()).model.schedule[0]!.spec;
+    const lines = templateLines(outline.outline, outline.making!.panels[0]!.cut, []);
+    expect(templateTiles(lines, tileSpace({ widthMm: 297, heightMm: 210 }))).toHaveLength(3);
+  });
 
   it('reads back as the model has it: sizes, buttons, corners, cloth', async () => {
     const data = orderPack(fourWays());

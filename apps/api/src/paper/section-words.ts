@@ -20,9 +20,9 @@ export interface SectionWords {
   back: SectionWord[];
 }
 
-/** Seam allowance of a panel: half of what it is cut larger. */
-export function seamAllowanceMm({ making }: Pick<CushionSpec, 'making'>): number | undefined {
-  const panel = making?.panels.find(({ name }) => name !== 'tufted face');
+/** Seam allowance: half of what a strip or side is cut larger. A plate may be cut larger for its crown or its corners. */
+function seamAllowanceMm({ making }: Pick<CushionSpec, 'making'>): number | undefined {
+  const panel = making?.panels.find(({ name }) => name === 'boxing' || name === 'side');
   return panel && (outlineExtent(panel.cut).depthMm - outlineExtent(panel.finished).depthMm) / 2;
 }
 
