@@ -1,6 +1,8 @@
 import type { NumberList } from './solid-arrays';
 
-const FIRST = 4096;
+/** Whole points and whole pairs of points, however many numbers each has: memory is read as all of one or the other. */
+const STRIDE = 12;
+const FIRST = 512 * STRIDE;
 
 /** Numbers in memory that is used again: what is made for each frame of a pull takes none anew. */
 export class Floats implements NumberList {
@@ -16,7 +18,9 @@ export class Floats implements NumberList {
     const start = this.length;
     this.length += values.length;
     if (this.length > this.memory.length) {
-      const grown = new Float32Array(Math.max(this.length, 2 * this.memory.length));
+      const grown = new Float32Array(
+        Math.max(Math.ceil(this.length / STRIDE) * STRIDE, 2 * this.memory.length),
+      );
       grown.set(this.memory);
       this.memory = grown;
     }

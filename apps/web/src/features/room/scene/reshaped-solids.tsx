@@ -1,6 +1,6 @@
 import type { Part } from '@settlewright/geometry';
 import { useEffect, useLayoutEffect, useMemo, useState } from 'react';
-import { BufferAttribute, BufferGeometry, DynamicDrawUsage } from 'three';
+import { BufferAttribute, BufferGeometry, DynamicDrawUsage, Sphere, Vector3 } from 'three';
 import { Floats } from './floats';
 import { linesOf } from './ink-lines';
 import { useDispose } from './piece-solids';
@@ -24,6 +24,13 @@ function write(geometry: BufferGeometry, name: string, { memory, length }: Float
   held.needsUpdate = true;
 }
 
+/** Behind what is drawn stand numbers of former frames: nothing may be reckoned from all of them. */
+function boundless(): BufferGeometry {
+  const geometry = new BufferGeometry();
+  geometry.boundingSphere = new Sphere(new Vector3(), Infinity);
+  return geometry;
+}
+
 interface Props {
   pieces: readonly (readonly Part[])[];
   printsOn: (pieceId: string) => readonly SeatPrint[];
@@ -36,8 +43,8 @@ interface Props {
 export function ReshapedSolids({ pieces, printsOn, letter, chosen, materials }: Props) {
   const [held] = useState(() => ({
     lists: eachSolidList(() => new Floats()),
-    surface: new BufferGeometry(),
-    rounds: new BufferGeometry(),
+    surface: boundless(),
+    rounds: boundless(),
   }));
   const { lists, surface, rounds } = held;
   const lines = useMemo(() => {
