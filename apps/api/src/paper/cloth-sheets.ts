@@ -1,25 +1,15 @@
 import {
   chartNote,
-  type ClothOfOrder,
   DIRECTION_WORDS,
   formatLength,
-  type LaidCloth,
   type LengthStyle,
   NAP_WORDS,
 } from '@settlewright/geometry';
 import { drawRoll, rollHeights } from './cloth-roll';
 import { type OrderPage, type OrderPages, PAD } from './order-pages';
 import { paragraph } from './paragraph';
-import type { SpecPack } from './spec-pack';
+import type { ClothOnPaper, SpecPack } from './spec-pack';
 import { marksWords } from './spec-words';
-
-/** A cloth of the order and, where its panels could be laid, how they lie. */
-export interface ClothOnPaper {
-  cloth: ClothOfOrder;
-  laid?: LaidCloth;
-  /** Nothing was said of it but its name: laid as a plain cloth of the usual width. */
-  assumed: boolean;
-}
 
 /** The panels of each cloth on its roll. */
 export function drawClothSheets(pages: OrderPages, pack: SpecPack): void {

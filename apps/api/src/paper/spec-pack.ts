@@ -1,5 +1,12 @@
-import type { CushionEdge, Drawing, LengthStyle, OrderModel, ScheduleRow } from '@settlewright/geometry';
-import type { ClothOnPaper } from './cloth-sheets';
+import type {
+  ClothOfOrder,
+  CushionEdge,
+  Drawing,
+  LaidCloth,
+  LengthStyle,
+  OrderModel,
+  ScheduleRow,
+} from '@settlewright/geometry';
 import type { Paper } from './pack';
 import type { ClothWay } from './plan-place';
 
@@ -124,6 +131,14 @@ export interface SpecPackData {
   /** The benches of the order from above and one side. */
   picture: Drawing;
   sections: readonly { bench: string; drawing: Drawing }[];
+}
+
+/** A cloth of the order and, where its panels could be laid, how they lie. */
+export interface ClothOnPaper {
+  cloth: ClothOfOrder;
+  laid?: LaidCloth;
+  /** Nothing was said of it but its name: laid as a plain cloth of the usual width. */
+  assumed: boolean;
 }
 
 /** The same with its cloths laid. */
