@@ -3,7 +3,7 @@ import { useMemo } from 'react';
 import { ShapeUtils, Vector2 } from 'three';
 import type { RoomPicture } from '../picture';
 import { linesOf } from './ink-lines';
-import { useDispose } from './piece-solids';
+import { useDispose } from './use-dispose';
 import type { SceneMaterials } from './shaders';
 import { MATERIALS, surfaceOf } from './solids';
 import { add, cross, dot, scale } from './vectors';

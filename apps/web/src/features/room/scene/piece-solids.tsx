@@ -1,6 +1,5 @@
 import { derivePieceParts, type Piece } from '@settlewright/geometry';
-import { memo, useEffect, useMemo } from 'react';
-import type { BufferGeometry } from 'three';
+import { memo, useMemo } from 'react';
 import type { Carried, DrawnPicture } from '../drawn-picture';
 import { linesOf } from './ink-lines';
 import { joinSolids, solidsOf, type PackedSolids } from './packed-solids';
@@ -8,13 +7,9 @@ import { ReshapedSolids } from './reshaped-solids';
 import { printsByPiece } from './seat-print';
 import type { SceneMaterials } from './shaders';
 import { surfaceOf } from './solids';
+import { useDispose } from './use-dispose';
 import { visiblePieces } from './visible-parts';
 import type { SceneView } from './views';
-
-/** Frees what a memo made when it is made again. */
-export function useDispose(geometries: Record<string, BufferGeometry>) {
-  useEffect(() => () => Object.values(geometries).forEach((geometry) => geometry.dispose()), [geometries]);
-}
 
 /** Where a group of the scene is set down when it is carried. */
 export const setDown = (carried: Carried | undefined) => ({

@@ -3,7 +3,7 @@ import { useEffect, useLayoutEffect, useMemo, useState } from 'react';
 import { BufferAttribute, BufferGeometry, DynamicDrawUsage, Sphere, Vector3 } from 'three';
 import { Floats } from './floats';
 import { linesOf } from './ink-lines';
-import { useDispose } from './piece-solids';
+import { useDispose } from './use-dispose';
 import type { SeatPrint } from './seat-print';
 import type { SceneMaterials } from './shaders';
 import { eachSolidList, SOLID_LISTS } from './solid-arrays';
