@@ -181,6 +181,55 @@ describe('the life of a cushion order', () => {
     });
   });
 
+  describe('the cloths of an order', () => {
+    const CLOTH = {
+      ...{ name: 'plum moquette', widthMm: 1400, selvedgeMm: 10, direction: 'up-roll', nap: 'to-the-front' },
+      ...{ repeatMm: { acrossMm: 350, alongMm: 320 }, controlLine: 'run', startMm: 300, stepMm: 100 },
+      ...{ pricePerMetreMinor: 4800, currency: 'EUR' },
+      com: { sampleKept: true, dyeLot: 'K 7', measuredWidthMm: 1390, flaws: 'a pull at 2 m' },
+    };
+    const change = (order: SentTo, covers: unknown, status = 200) =>
+      as(test, owner).patch(order.path).send({ covers }).expect(status);
+    const read = async ({ path }: SentTo) => (await as(test, owner).get(path).expect(200)).body as object;
+
+    it('are kept, sent, and said side by side when they change', async () => {
+      const order = await orders.send();
+      expect(await read(order)).toMatchObject({ covers: [], sent: { changedSince: false } });
+      await change(order, [{ ...CLOTH, cushionMarks: [order.cushion.mark] }]);
+      expect(await read(order)).toMatchObject({
+        covers: [{ ...CLOTH, cushionMarks: [order.cushion.mark] }],
+        sent: { changedSince: true },
+      });
+      await byShop(order, 'send', { upholstererId: order.upholstererId });
+      expect(await read(order)).toMatchObject({ sent: { changedSince: false } });
+      const life = (await as(test, null).get(`/link/${order.token}/life`).expect(200)).body as LifeBody;
+      expect(life.changes).toEqual([
+        { mark: null, field: 'cloths', before: '', after: expect.stringContaining('1400 mm wide') },
+      ]);
+      const priced = { ...CLOTH, cushionMarks: [order.cushion.mark], pricePerMetreMinor: 5200 };
+      await change(order, [priced]);
+      expect(await read(order)).toMatchObject({ covers: [priced], sent: { changedSince: false } });
+      expect(JSON.stringify(life)).not.toContain('EUR');
+      await as(test, owner).patch(order.path).send({ title: 'Seats again' }).expect(200);
+      expect(await read(order)).toMatchObject({ covers: [{ name: 'plum moquette' }] });
+    });
+
+    it.each([
+      ['covers.0.direction', [{ ...CLOTH, direction: 'either' }]],
+      ['covers.0.currency', [{ ...CLOTH, currency: undefined }]],
+      ['covers.0.pricePerMetreMinor', [{ ...CLOTH, pricePerMetreMinor: 12.5 }]],
+      ['covers.0.cushionMarks', [{ ...CLOTH, cushionMarks: ['C900'] }]],
+      ['covers.0.com.dyeLot', [{ ...CLOTH, com: { ...CLOTH.com, dyeLot: 'K\u0000' } }]],
+      ['covers', [CLOTH, CLOTH]],
+      ['covers', { 0: CLOTH }],
+    ])('are refused by %s', async (path, covers) => {
+      const order = await orders.send();
+      const { body } = await change(order, covers, 400);
+      expect((body as { fields: { path: string }[] }).fields.map((field) => field.path)).toContain(path);
+      expect(await read(order)).toMatchObject({ covers: [] });
+    });
+  });
+
   describe('the first article', () => {
     const mark = (order: SentTo, to: string, status = 200, more: object = {}) =>
       byLink(order, 'state', { to, name: 'Odile', ...more }, status);

@@ -1,3 +1,6 @@
+import { isDeepStrictEqual } from 'node:util';
+import type { OrderCover } from '@settlewright/geometry';
+
 /** The words of the order; sizes come from the revision. */
 export interface OrderSpec {
   cover: string;
@@ -33,6 +36,8 @@ export interface OrderContent {
   spec: OrderSpec;
   /** How far a finished size may be off; absent in what was sent before it could be agreed. */
   toleranceMm?: number;
+  /** Its cloths; none as long as nobody said them, absent in what was sent before they could be. */
+  covers?: OrderCover[];
 }
 
 /** A quarter of an inch either way, unless an order says otherwise. */
@@ -40,6 +45,8 @@ export const DEFAULT_TOLERANCE_MM = 6.35;
 
 export const toleranceOf = ({ toleranceMm }: Pick<OrderContent, 'toleranceMm'>): number =>
   toleranceMm ?? DEFAULT_TOLERANCE_MM;
+
+export const coversOf = ({ covers }: Pick<OrderContent, 'covers'>): OrderCover[] => covers ?? [];
 
 /** The content as the upholsterer last received it. */
 export interface SentContent extends OrderContent {
@@ -50,7 +57,15 @@ export interface SentContent extends OrderContent {
 
 export function contentOf(from: OrderContent): OrderContent {
   const { revisionLetter, title, neededBy, cushionMarks, spec } = from;
-  return { revisionLetter, title, neededBy, cushionMarks, spec, toleranceMm: toleranceOf(from) };
+  return {
+    revisionLetter,
+    title,
+    neededBy,
+    cushionMarks,
+    spec,
+    toleranceMm: toleranceOf(from),
+    covers: coversOf(from),
+  };
 }
 
 export function sameContent(a: OrderContent, b: OrderContent): boolean {
@@ -63,5 +78,9 @@ export function sameContent(a: OrderContent, b: OrderContent): boolean {
       SPEC_KEYS.map((key) => spec[key]),
       toleranceOf({ toleranceMm }),
     ]);
-  return plain(a) === plain(b);
+  return plain(a) === plain(b) && isDeepStrictEqual(unpriced(a), unpriced(b));
 }
+
+/** What a workshop pays for its cloth is no matter of the upholsterer, and no reason to send an order again. */
+const unpriced = (content: OrderContent) =>
+  coversOf(content).map((cover) => ({ ...cover, pricePerMetreMinor: undefined, currency: undefined }));

@@ -9,7 +9,7 @@ import { dayInWords, momentInWords } from './day-in-words';
 import type { CushionOrder } from './entities/cushion-order.entity';
 import { IssuedSets } from './issued-sets.service';
 import { markedSections } from './marked-sections';
-import { type OrderContent, toleranceOf } from './order-content';
+import { coversOf, type OrderContent, toleranceOf } from './order-content';
 import { bagLabels, specCushions } from './spec-cushions';
 
 /** Room for a mark that moves off its cushion. */
@@ -42,8 +42,9 @@ export class OrderPaper {
       this.workshops.get(workshopId),
     ]);
     const cushions = this.issued.select(issued, content.cushionMarks);
-    const covers = assumedCovers(content);
-    const assumedCloths = covers.map(({ name }) => name);
+    const said = coversOf(content);
+    const covers = said.length > 0 ? said : assumedCovers(content);
+    const assumedCloths = said.length > 0 ? [] : covers.map(({ name }) => name);
     const model = orderModel({ cushions, covers, rules: issued.cushionRules });
     return {
       paper: workshop.paper,
@@ -78,7 +79,7 @@ export class OrderPaper {
   }
 }
 
-/** Until a cloth is described: a plain one of the usual width, so that there is a length to talk about. */
+/** Until the workshop says its cloths: a plain one of the usual width, so that there is a length to talk about. */
 function assumedCovers({ spec }: OrderContent): OrderCover[] {
   const name = spec.cover.trim().replace(/\s+/g, ' ').slice(0, NAME_LETTERS);
   return [plainCover(name || 'cover')];

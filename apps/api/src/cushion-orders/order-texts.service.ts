@@ -6,7 +6,7 @@ import { CushionOrder } from './entities/cushion-order.entity';
 import { OrderEvent } from './entities/order-event.entity';
 import { OrderMessage } from './entities/order-message.entity';
 import { lifeTexts } from './life/life-texts';
-import { type OrderContent, type OrderSpec, SPEC_KEYS } from './order-content';
+import { coversOf, type OrderContent, type OrderSpec, SPEC_KEYS } from './order-content';
 
 type Change = (text: string) => string;
 
@@ -62,21 +62,36 @@ function ofOrder(manager: EntityManager, order: CushionOrder, where: string): Ke
   };
 }
 
-function contentTexts(
-  { title, spec }: OrderContent,
-  where: string,
-  sent: Pick<KeptText, 'alreadySent'>,
-): KeptText[] {
+function contentTexts(content: OrderContent, where: string, sent: Pick<KeptText, 'alreadySent'>): KeptText[] {
+  const { title, spec } = content;
   return [
     { where: `${where}, title`, text: title, ...sent },
     ...SPEC_KEYS.map((key) => ({ where: `${where}, ${key}`, text: spec[key], ...sent })),
+    ...coversOf(content).flatMap(({ name, com }) => [
+      { where: `${where}, cloth`, text: name, ...sent },
+      ...(com
+        ? [
+            { where: `${where}, dye lot`, text: com.dyeLot, ...sent },
+            { where: `${where}, flaws of a cloth`, text: com.flaws, ...sent },
+          ]
+        : []),
+    ]),
   ];
 }
 
-function changedWords({ title, spec }: OrderContent, change: Change): Pick<OrderContent, 'title' | 'spec'> {
+function changedWords(
+  content: OrderContent,
+  change: Change,
+): Pick<OrderContent, 'title' | 'spec' | 'covers'> {
+  const { title, spec } = content;
   const words = Object.fromEntries(SPEC_KEYS.map((key) => [key, change(spec[key])])) as Record<
     keyof OrderSpec,
     string
   >;
-  return { title: change(title), spec: words };
+  const covers = coversOf(content).map(({ name, com, ...rest }) => ({
+    ...rest,
+    name: change(name),
+    ...(com && { com: { ...com, dyeLot: change(com.dyeLot), flaws: change(com.flaws) } }),
+  }));
+  return { title: change(title), spec: words, covers };
 }

@@ -82,6 +82,8 @@ export class OrderViews {
       cushionMarks: order.cushionMarks,
       spec: order.spec,
       toleranceMm: order.toleranceMm,
+      covers: order.covers,
+      cushionRules: issued.cushionRules,
       cushions: cushions,
       sent: order.sent && {
         revisionLetter: order.sent.revisionLetter,

@@ -15,6 +15,7 @@ import { findOrder, lockOrder, type OrderPlace } from './order-access';
 import { DEFAULT_TOLERANCE_MM, type OrderSpec, SPEC_KEYS } from './order-content';
 import { recordEvent } from './order-record';
 import { mayChange, STATE_WORDS } from './order-states';
+import { saidCovers } from './said-covers';
 
 const EMPTY_SPEC = Object.fromEntries(SPEC_KEYS.map((key) => [key, ''])) as Record<keyof OrderSpec, string>;
 
@@ -74,6 +75,7 @@ export class OrdersService {
           cushionMarks,
           cushionCount: cushions.length,
           toleranceMm: dto.toleranceMm ?? DEFAULT_TOLERANCE_MM,
+          covers: saidCovers(dto.covers ?? [], cushions),
           spec: { ...EMPTY_SPEC, ...given(dto.spec) },
           state: 'draft' as const,
           upholstererId: null,
@@ -110,7 +112,9 @@ export class OrdersService {
         setId: order.setId,
         letter: order.revisionLetter,
       };
-      order.cushionCount = (await this.issued.cushions(set, order.cushionMarks)).length;
+      const cushions = await this.issued.cushions(set, order.cushionMarks);
+      order.cushionCount = cushions.length;
+      if (dto.covers !== undefined) order.covers = saidCovers(dto.covers, cushions);
       await manager.save(order);
       await this.record(manager, member, 'cushion-order.changed', order.id);
       return findOrder(manager, place);

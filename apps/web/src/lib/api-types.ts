@@ -3978,6 +3978,52 @@ export interface components {
             page: number;
             pageSize: number;
         };
+        ClothRepeatDto: {
+            acrossMm: number;
+            alongMm: number;
+        };
+        OwnClothDto: {
+            /** @description a sample was kept to compare with */
+            sampleKept: boolean;
+            dyeLot: string;
+            /** @description goes before the width that was said */
+            measuredWidthMm?: number;
+            /** @description length that came */
+            receivedMm?: number;
+            /** Format: date */
+            receivedOn?: string;
+            flaws: string;
+        };
+        OrderCoverDto: {
+            name: string;
+            widthMm: number;
+            /** @description lost at each edge */
+            selvedgeMm: number;
+            /** @enum {string} */
+            direction: "up-roll" | "railroad" | "either";
+            /** @enum {string} */
+            nap: "none" | "to-the-front" | "to-the-back" | "to-the-left" | "to-the-right";
+            repeatMm: components["schemas"]["ClothRepeatDto"];
+            /**
+             * @description on what the pattern is centered
+             * @enum {string}
+             */
+            controlLine: "cushion" | "run";
+            /** @description left out at the start of the roll for flaws and for centering */
+            startMm: number;
+            /** @description bought in whole steps of this */
+            stepMm: number;
+            /** @description in the smallest unit of the currency */
+            pricePerMetreMinor?: number;
+            /** @description ISO 4217 */
+            currency?: string;
+            /** @description when the workshop sends the cloth in */
+            com?: components["schemas"]["OwnClothDto"];
+            /** @description absent: every cushion of the order */
+            cushionMarks?: string[];
+            /** @description absent: all of the cover */
+            parts?: ("faces" | "edges" | "welt")[];
+        };
         OrderSpecInput: {
             cover?: string;
             /** @description beyond grade, density and firmness, which the set holds */
@@ -4002,6 +4048,8 @@ export interface components {
             cushionMarks?: string[] | null;
             /** @description how far a finished size may be off */
             toleranceMm?: number;
+            /** @description none: nobody said them yet */
+            covers?: components["schemas"]["OrderCoverDto"][];
             spec?: components["schemas"]["OrderSpecInput"];
         };
         OrderSpecDto: {
@@ -4254,6 +4302,12 @@ export interface components {
             spec: components["schemas"]["OrderSpecDto"];
             /** @description how far a finished size may be off */
             toleranceMm: number;
+            /** @description its cloths; none as long as nobody said them */
+            covers: components["schemas"]["OrderCoverDto"][];
+            /** @description allowances and foams that were in force when its revision was issued */
+            cushionRules: {
+                [key: string]: unknown;
+            };
             cushions: components["schemas"]["CushionDto"][];
             sent: components["schemas"]["SentDto"] | null;
             /** @description of what was last sent */
@@ -4278,6 +4332,8 @@ export interface components {
             cushionMarks?: string[] | null;
             /** @description how far a finished size may be off */
             toleranceMm?: number;
+            /** @description none: nobody said them yet */
+            covers?: components["schemas"]["OrderCoverDto"][];
             spec?: components["schemas"]["OrderSpecInput"];
         };
         SendOrderDto: {
@@ -4314,7 +4370,7 @@ export interface components {
             text: string;
         };
         /** @enum {string} */
-        OrderChangedField: "revision" | "title" | "needed-by" | "cushions" | "tolerance" | "cover" | "foam" | "welt" | "closure" | "fixing" | "buttons" | "notes" | "flammability" | "width" | "depth" | "thickness" | "foam-grade" | "hand" | "button-count" | "button-places";
+        OrderChangedField: "revision" | "title" | "needed-by" | "cushions" | "tolerance" | "cloths" | "cover" | "foam" | "welt" | "closure" | "fixing" | "buttons" | "notes" | "flammability" | "width" | "depth" | "thickness" | "foam-grade" | "hand" | "button-count" | "button-places";
         OrderChangeDto: {
             /** @description null: the order itself */
             mark: string | null;

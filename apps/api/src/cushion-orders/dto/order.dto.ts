@@ -1,9 +1,11 @@
+import type { CushionRules } from '@settlewright/geometry';
 import { ApiProperty, ApiPropertyOptional } from '@nestjs/swagger';
 import { MAIL_STATES, type MailState } from '../../mail/entities/outbox-mail.entity';
 import { EVENT_KINDS, type EventKind } from '../entities/order-event.entity';
 import { SIDES, type Side } from '../entities/order-message.entity';
 import { ORDER_STATES, type OrderState, RECORDED_STATES, type RecordedState } from '../order-states';
 import { CushionDto } from './cushion.dto';
+import { OrderCoverDto } from './order-cover.dto';
 import { OrderSpecDto } from './order-spec.dto';
 
 const LINK_STATES = ['none', 'valid', 'expired', 'revoked'] as const;
@@ -115,6 +117,14 @@ export class OrderDto extends OrderSummaryDto {
   spec: OrderSpecDto;
   @ApiProperty({ description: 'how far a finished size may be off' })
   toleranceMm: number;
+  @ApiProperty({ type: [OrderCoverDto], description: 'its cloths; none as long as nobody said them' })
+  covers: OrderCoverDto[];
+  @ApiProperty({
+    type: 'object',
+    additionalProperties: true,
+    description: 'allowances and foams that were in force when its revision was issued',
+  })
+  cushionRules: CushionRules;
   @ApiProperty({ type: [CushionDto] })
   cushions: CushionDto[];
   @ApiProperty({ type: SentDto, nullable: true })

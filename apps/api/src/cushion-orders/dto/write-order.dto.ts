@@ -1,3 +1,4 @@
+import { MAX_COVERS } from '@settlewright/geometry';
 import { ApiProperty, ApiPropertyOptional, OmitType, PartialType } from '@nestjs/swagger';
 import { Type } from 'class-transformer';
 import {
@@ -21,6 +22,7 @@ import { MayBeLeftOut } from '../../common/may-be-left-out';
 import { TextField } from '../../common/text-field';
 import { CushionMark } from '../cushion-mark';
 import { MARKED_STATES, type MarkedState, RECORDED_STATES, type RecordedState } from '../order-states';
+import { OrderCoverDto } from './order-cover.dto';
 import { OrderSpecInput } from './order-spec.dto';
 
 const LETTER = /^[A-Z]{1,3}$/;
@@ -58,6 +60,12 @@ export class CreateOrderDto {
   @Min(0.5)
   @Max(25.4)
   toleranceMm?: number;
+
+  @ApiPropertyOptional({ type: [OrderCoverDto], description: 'none: nobody said them yet' })
+  @MayBeLeftOut()
+  @IsArray()
+  @ArrayMaxSize(MAX_COVERS)
+  covers?: unknown[];
 
   @ApiPropertyOptional({ type: OrderSpecInput })
   @IsOptional()

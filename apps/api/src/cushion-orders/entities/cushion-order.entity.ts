@@ -1,3 +1,4 @@
+import type { OrderCover } from '@settlewright/geometry';
 import {
   Column,
   CreateDateColumn,
@@ -74,6 +75,10 @@ export class CushionOrder implements OrderContent {
   /** How far a finished size may be off, either way. */
   @Column('double precision', { default: DEFAULT_TOLERANCE_MM })
   toleranceMm: number;
+
+  /** Its cloths; none as long as nobody said them. */
+  @Column({ type: 'jsonb', default: [] })
+  covers: OrderCover[];
 
   @Column('text', { default: 'draft' })
   state: OrderState;

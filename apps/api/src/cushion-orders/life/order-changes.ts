@@ -1,5 +1,6 @@
 import type { CushionSpec } from '@settlewright/geometry';
-import { type OrderContent, SPEC_KEYS, toleranceOf } from '../order-content';
+import { clothsInWords } from '../cloths-in-words';
+import { coversOf, type OrderContent, SPEC_KEYS, toleranceOf } from '../order-content';
 
 export const CHANGED_FIELDS = [
   'revision',
@@ -7,6 +8,7 @@ export const CHANGED_FIELDS = [
   'needed-by',
   'cushions',
   'tolerance',
+  'cloths',
   ...SPEC_KEYS,
   'width',
   'depth',
@@ -56,6 +58,7 @@ function contentChanges(before: Sending, after: Sending): OrderChange[] {
     words(null, 'needed-by', before.content.neededBy ?? '', after.content.neededBy ?? ''),
     words(null, 'cushions', marks(before), marks(after)),
     size(null, 'tolerance', toleranceOf(before.content), toleranceOf(after.content)),
+    words(null, 'cloths', clothsInWords(coversOf(before.content)), clothsInWords(coversOf(after.content))),
     ...SPEC_KEYS.map((key) => words(null, key, before.content.spec[key], after.content.spec[key])),
   ].flat();
 }

@@ -10,6 +10,7 @@ import { AgeOfCastMembers1796165200000 } from './1796165200000-age-of-cast-membe
 import { DimensionSearches1796170200000 } from './1796170200000-dimension-searches';
 import { LifeOfAnOrder1796201340000 } from './1796201340000-life-of-an-order';
 import { CushionSettings1796202960000 } from './1796202960000-cushion-settings';
+import { ClothsOfAnOrder1796206800000 } from './1796206800000-cloths-of-an-order';
 
 /** In the order in which they run. What is merged is never changed. */
 export const MIGRATIONS: (new () => MigrationInterface)[] = [
@@ -24,4 +25,5 @@ export const MIGRATIONS: (new () => MigrationInterface)[] = [
   DimensionSearches1796170200000,
   LifeOfAnOrder1796201340000,
   CushionSettings1796202960000,
+  ClothsOfAnOrder1796206800000,
 ];

@@ -14,6 +14,7 @@ const FIELD_WORDS: Record<Change['field'], string> = {
   'needed-by': 'Needed by',
   cushions: 'Cushions',
   tolerance: 'Tolerance, either way',
+  cloths: 'Cloths',
   ...SPEC_WORDS,
   width: 'width',
   depth: 'depth',
