@@ -9,6 +9,7 @@ const SITTERS = 12;
 /** Bodies come one by one from a worker: nothing of that is to fall into the figures. */
 const SETTLE_MS = 15_000;
 const PAUSE_MS = 3000;
+const TAKEN_MS = 2000;
 
 const middleOf = ({ x, y, width, height }) => ({ x: x + width / 2, y: y + height / 2 });
 
@@ -22,8 +23,8 @@ async function carry(page) {
       middleOf(await grip(page, end).boundingBox()),
     ),
   );
-  for (const asideShare of [0.1, 0.2, 0.3, 0.4]) {
-    for (const byPx of [-20, -40, -60, -80]) {
+  for (const asideShare of [0.2, 0.3, 0.5, 0.6, 0.8]) {
+    for (const byPx of [-50, -56, -62, -68]) {
       const x = left.x + (right.x - left.x) * asideShare;
       const spot = { x, y: (left.y + right.y) / 2 + byPx };
       if (await isTaken(page, spot)) return dragFrom(page, spot);
@@ -45,8 +46,14 @@ async function isTaken(page, { x, y }) {
   await page.mouse.move(x, y);
   await page.mouse.down();
   await page.mouse.move(x + 10, y + 10);
-  await page.waitForTimeout(50);
-  const taken = await page.evaluate(() => document.querySelector('[aria-busy="true"]') !== null);
+  const taken = await page
+    .locator('[aria-busy="true"]')
+    .first()
+    .waitFor({ state: 'attached', timeout: TAKEN_MS })
+    .then(
+      () => true,
+      () => false,
+    );
   await page.mouse.move(x, y);
   await page.keyboard.press('Escape');
   await page.mouse.up();
