@@ -19,7 +19,16 @@ export default defineConfig({
     sourcemap: false,
     rolldownOptions: {
       output: {
-        codeSplitting: { groups: [{ name: 'three', test: /node_modules[\\/]three[\\/](?!examples)/ }] },
+        codeSplitting: {
+          groups: [
+            { name: 'three', test: /node_modules[\\/]three[\\/](?!examples)/ },
+            // What every page needs packs tighter together.
+            {
+              name: 'frame',
+              test: /node_modules[\\/](react|react-dom|react-router|scheduler)[\\/]/,
+            },
+          ],
+        },
       },
     },
   },

@@ -16,12 +16,11 @@ import { NumberSlip } from './number-slip.tsx';
 interface Props {
   piece: Piece;
   actions: PieceActions;
-  open: boolean;
   onClose: () => void;
 }
 
 /** Every number and choice of a piece as a plain form: the twin of the sentence and the tapes. */
-export function NumbersDialog({ piece, actions, open, onClose }: Props) {
+export default function NumbersDialog({ piece, actions, onClose }: Props) {
   const { canEdit } = useSurroundings();
   const parameters = parametersOf(piece);
   const groups = [
@@ -29,7 +28,7 @@ export function NumbersDialog({ piece, actions, open, onClose }: Props) {
     { title: 'Changed less often', items: parameters.filter((parameter) => parameter.group === 'more') },
   ];
   return (
-    <Dialog open={open} onClose={onClose} wide title={`All numbers of ${piece.mark}`}>
+    <Dialog open onClose={onClose} wide title={`All numbers of ${piece.mark}`}>
       <div className="grid gap-6">
         {canEdit && (
           <TextField

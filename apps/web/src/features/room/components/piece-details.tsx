@@ -9,7 +9,7 @@ import {
   type Piece,
   type SetDocument,
 } from '@settlewright/geometry';
-import { useState } from 'react';
+import { lazy, Suspense, useState } from 'react';
 import { Button } from '@/components/button.tsx';
 import { Menu } from '@/components/menu.tsx';
 import { CushionsButton } from '../cushions-make/cushions-button.tsx';
@@ -17,9 +17,10 @@ import type { PieceActions } from '../hooks/use-piece-actions.ts';
 import { useSurroundings } from '../room-context.tsx';
 import { sitterName } from '../sitters.ts';
 import { openHandForm } from '../together/hand-form.ts';
-import { NumbersDialog } from './numbers-dialog.tsx';
 import { PlacesDialog } from './places-dialog.tsx';
 import { shortName } from '@/lib/short-name.ts';
+
+const NumbersDialog = lazy(() => import('./numbers-dialog.tsx'));
 
 interface Props {
   piece: Piece;
@@ -69,12 +70,11 @@ export function PieceDetails({ piece, document, actions, onChoose, onCopy }: Pro
           />
         )}
       </p>
-      <NumbersDialog
-        piece={piece}
-        actions={actions}
-        open={open === 'numbers'}
-        onClose={() => setOpen(null)}
-      />
+      {open === 'numbers' && (
+        <Suspense fallback={null}>
+          <NumbersDialog piece={piece} actions={actions} onClose={() => setOpen(null)} />
+        </Suspense>
+      )}
       <PlacesDialog
         piece={piece}
         document={document}

@@ -1,5 +1,5 @@
 import type { Piece } from '@settlewright/geometry';
-import { useMemo, useState, type ReactNode } from 'react';
+import { lazy, Suspense, useMemo, useState, type ReactNode } from 'react';
 import { useStore } from 'zustand';
 import { Button } from '@/components/button.tsx';
 import type { SetInfo } from '../api.ts';
@@ -11,17 +11,17 @@ import { useGroupActions } from '../hooks/use-group-actions.ts';
 import { usePieceActions } from '../hooks/use-piece-actions.ts';
 import { useRoomCells } from '../hooks/use-room-cells.ts';
 import { useSavedCell } from '../hooks/use-saved-cell.ts';
+import { useFetchedParts } from '../hooks/use-fetched-parts.ts';
 import { useShortcuts, type ShortcutActions } from '../hooks/use-shortcuts.ts';
 import { RoomContext, useAutosave, usePicture, useSurroundings } from '../room-context.tsx';
 import { useRoomStore, useUndo } from '../store.ts';
-import { HandFormPanel } from '../together/hand-form-panel.tsx';
 import { useHandForm } from '../together/hand-form.ts';
 import { PosturePanel } from '../posture/posture-panel.tsx';
 import { MeasurePanel } from '../tape-tool/measure-panel.tsx';
 import { WaysPanel } from '../ways/ways-panel.tsx';
 import { ChosenPieces } from './chosen-pieces.tsx';
 import { Counted } from './counted.tsx';
-import { ConflictScreen } from './conflict-screen.tsx';
+import { Conflict } from './conflict.tsx';
 import { DraftRefused } from './draft-refused.tsx';
 import { EmptySet } from './empty-set.tsx';
 import { IssueRevision } from './issue-revision.tsx';
@@ -32,6 +32,8 @@ import { NotesPanel } from './notes-panel.tsx';
 import { PiecesPanel } from './pieces-panel.tsx';
 import { SceneStage } from './scene-stage.tsx';
 import { SpecSentence } from './spec-sentence.tsx';
+
+const HandFormPanel = lazy(() => import('../together/hand-form-panel.tsx'));
 
 interface Props {
   lastRevision: SetInfo['lastRevision'];
@@ -60,6 +62,7 @@ export function RoomDesk({ lastRevision, foot, aboutPiece }: Props) {
   const mayChange = canEdit && !clientView;
   useRoomCells(lastRevision, mayChange);
   useSavedCell(autosave);
+  useFetchedParts();
 
   const keys = useMemo<ShortcutActions>(
     () => ({
@@ -75,7 +78,7 @@ export function RoomDesk({ lastRevision, foot, aboutPiece }: Props) {
   );
   useShortcuts(keys);
 
-  if (save.kind === 'conflict') return <ConflictScreen conflict={save.conflict} />;
+  if (save.kind === 'conflict') return <Conflict conflict={save.conflict} />;
 
   const { document } = picture;
   const piece = document.pieces.find((candidate) => candidate.id === address.pieceId);
@@ -110,7 +113,9 @@ export function RoomDesk({ lastRevision, foot, aboutPiece }: Props) {
                 />
                 {!address.fitOpen &&
                   (mayChange && handForm ? (
-                    <HandFormPanel choose={address.choose} />
+                    <Suspense fallback={null}>
+                      <HandFormPanel choose={address.choose} />
+                    </Suspense>
                   ) : mayChange && choosing.pieces.length > 1 ? (
                     <ChosenPieces
                       document={document}

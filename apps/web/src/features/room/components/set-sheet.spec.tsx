@@ -76,7 +76,7 @@ it('undoes and redoes by the keys, on every page of a set', () => {
   autosave.stop();
 });
 
-it('shows what two people changed in place of the page', () => {
+it('shows what two people changed in place of the page', async () => {
   const { autosave } = open();
   const theirs = {
     number: 42,
@@ -87,7 +87,9 @@ it('shows what two people changed in place of the page', () => {
   act(() =>
     autosave.state.setState({ save: { kind: 'conflict', conflict: { current: theirs, base: null } } }),
   );
-  expect(screen.getByRole('heading', { name: 'Dining car changed while you were working.' })).toBeVisible();
+  expect(
+    await screen.findByRole('heading', { name: 'Dining car changed while you were working.' }),
+  ).toBeVisible();
   expect(screen.queryByText('the stick')).toBeNull();
   autosave.stop();
 });

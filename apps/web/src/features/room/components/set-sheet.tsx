@@ -6,7 +6,7 @@ import { useSavedCell } from '../hooks/use-saved-cell.ts';
 import { useUndoKeys } from '../hooks/use-shortcuts.ts';
 import { useAutosave, useSurroundings } from '../room-context.tsx';
 import { useUndo } from '../store.ts';
-import { ConflictScreen } from './conflict-screen.tsx';
+import { Conflict } from './conflict.tsx';
 import { DraftRefused } from './draft-refused.tsx';
 import { OpenRoom } from './open-room.tsx';
 
@@ -31,7 +31,7 @@ function Frame({ path, children }: Props) {
       [canEdit],
     ),
   );
-  if (save.kind === 'conflict') return <ConflictScreen conflict={save.conflict} />;
+  if (save.kind === 'conflict') return <Conflict conflict={save.conflict} />;
   return (
     <>
       {save.kind === 'refused' && (

@@ -6,7 +6,7 @@ import { MirrorForm } from './mirror-form.tsx';
 import { RowForm } from './row-form.tsx';
 
 /** The form that is open for the chosen pieces; what it would do is seen in the drawing. */
-export function HandFormPanel({ choose }: { choose: (ids: readonly string[]) => void }) {
+export default function HandFormPanel({ choose }: { choose: (ids: readonly string[]) => void }) {
   const open = useHandForm((state) => state.open);
   // What was taken: the form looks at the set as it was before its own preview.
   const document = useRoom((state) => state.document);

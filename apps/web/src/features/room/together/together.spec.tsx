@@ -18,7 +18,7 @@ import { RoomContext, type RoomSurroundings } from '../room-context.tsx';
 import { createRoomStore, RoomStoreContext, undoNames, useRoom, type RoomStore } from '../store.ts';
 import { ChosenPieces } from '../components/chosen-pieces.tsx';
 import { PiecesPanel } from '../components/pieces-panel.tsx';
-import { HandFormPanel } from './hand-form-panel.tsx';
+import HandFormPanel from './hand-form-panel.tsx';
 import { HiddenNote } from './hidden-note.tsx';
 import { wipeClip } from '../clipboard/clip.ts';
 
