@@ -1,3 +1,4 @@
+import type { OrderCover } from '@settlewright/geometry';
 import { useMutation, useQuery, useQueryClient } from '@tanstack/react-query';
 import { api } from '@/lib/api-client.ts';
 import type { OrderState, Page, Upholsterer } from '@/lib/contract.ts';
@@ -55,6 +56,7 @@ export interface OrderInput {
   cushionMarks: string[] | null;
   spec: OrderSpec;
   toleranceMm: number;
+  covers: OrderCover[];
 }
 
 export const useChangeOrder = (path: OrderPath) =>

@@ -1,4 +1,4 @@
-import type { CushionSpec } from '@settlewright/geometry';
+import type { CushionRules, CushionSpec, OrderCover } from '@settlewright/geometry';
 import type { OrderState, RoundTo, UnitSystem } from '@/lib/contract.ts';
 
 /** The words of an order beside its sizes. */
@@ -85,6 +85,10 @@ export interface Order {
   spec: OrderSpec;
   /** How far a finished size may be off. */
   toleranceMm: number;
+  /** Its cloths; none as long as nobody said them. */
+  covers: OrderCover[];
+  /** Allowances and foams that its revision was issued with. */
+  cushionRules: CushionRules;
   cushions: CushionSpec[];
   sent: { revisionLetter: string; at: string; byName: string; changedSince: boolean } | null;
   acknowledgement: Acknowledgement | null;

@@ -1,4 +1,4 @@
-import { useMemo, useState } from 'react';
+import { lazy, Suspense, useMemo, useState } from 'react';
 import { Button } from '@/components/button.tsx';
 import { PaleBars } from '@/components/loading.tsx';
 import { Notice } from '@/components/notice.tsx';
@@ -17,6 +17,8 @@ import { CushionGroups } from './cushion-groups.tsx';
 import { ChangeOrderDialog, RecordStateDialog } from './order-dialogs.tsx';
 import { OrderSide } from './order-side.tsx';
 import { SendOrderDialog } from './send-order-dialog.tsx';
+
+const ClothsSection = lazy(() => import('../cloths/cloths-section.tsx'));
 
 function Opened({ path, order }: { path: OrderPath; order: Order }) {
   const { canEdit } = useWorkshop();
@@ -99,6 +101,11 @@ function Opened({ path, order }: { path: OrderPath; order: Order }) {
       <div className="grid gap-10 desk:grid-cols-[minmax(0,1fr)_20rem]">
         <div className="min-w-0">
           <CushionGroups cushions={order.cushions} words={order.spec} toleranceMm={order.toleranceMm} />
+          {marks.length > 0 && (
+            <Suspense fallback={<PaleBars words="Working out the cloth" rows={3} />}>
+              <ClothsSection path={path} order={order} />
+            </Suspense>
+          )}
           {order.spec.notes !== '' && (
             <p className="mb-3 max-w-text whitespace-pre-line">
               <b className="font-semibold">Notes.</b> {order.spec.notes}

@@ -1,4 +1,10 @@
-import { addPiece, deriveCushions, emptySetDocument } from '@settlewright/geometry';
+import {
+  addPiece,
+  cushionRules,
+  deriveCushions,
+  emptySetDocument,
+  NO_OWN_CUSHIONS,
+} from '@settlewright/geometry';
 import type { OrderLife } from '@/lib/contract.ts';
 import type { Order, PublicOrder } from '../order.ts';
 
@@ -45,6 +51,8 @@ export const ORDER: Order = {
   openQuestions: 0,
   spec: SPEC,
   toleranceMm: 6.35,
+  covers: [],
+  cushionRules: cushionRules(NO_OWN_CUSHIONS),
   cushions: CUSHIONS,
   sent: null,
   acknowledgement: null,
