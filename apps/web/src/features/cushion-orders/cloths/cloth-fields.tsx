@@ -1,9 +1,8 @@
 import { DIRECTION_WORDS, NAP_WORDS } from '@settlewright/geometry';
-import type { ReactNode } from 'react';
-import { LengthField } from '@/components/length-field.tsx';
 import { Select } from '@/components/select.tsx';
 import { TextField } from '@/components/text-field.tsx';
-import type { ClothDraft, Covered, LengthKey, PartChoice } from './cloth-draft.ts';
+import type { Covered, PartChoice } from './cloth-draft.ts';
+import { ClothLength, type ClothFieldsProps } from './cloth-length.tsx';
 import { OwnClothFields } from './own-cloth-fields.tsx';
 
 const sentence = (words: string) => words.charAt(0).toUpperCase() + words.slice(1);
@@ -23,42 +22,6 @@ const PARTS: Record<PartChoice, string> = {
   edges: 'the edges only',
   welt: 'the welt only',
 };
-
-export interface ClothFieldsProps {
-  draft: ClothDraft;
-  faults: Record<string, string>;
-  /** "yard" or "metre" */
-  per: string;
-  onChange: (change: Partial<ClothDraft>) => void;
-}
-
-/** A length of a cloth, never in feet. */
-export function ClothLength({
-  at,
-  path,
-  range: [minMm, maxMm],
-  draft,
-  faults,
-  onChange,
-  ...words
-}: Omit<ClothFieldsProps, 'per'> & {
-  at: LengthKey;
-  path: string;
-  range: [number, number];
-  label: string;
-  description?: ReactNode;
-}) {
-  const entry = draft.lengths[at];
-  return (
-    <LengthField
-      {...words}
-      {...{ entry, minMm, maxMm }}
-      feet={false}
-      error={entry.problem ?? faults[path]}
-      onChange={(next) => onChange({ lengths: { ...draft.lengths, [at]: next } })}
-    />
-  );
-}
 
 /** All that is said of one cloth. */
 export function ClothFields({ per, ...form }: ClothFieldsProps) {

@@ -1,5 +1,5 @@
 import { TextArea, TextField } from '@/components/text-field.tsx';
-import { ClothLength, type ClothFieldsProps } from './cloth-fields.tsx';
+import { ClothLength, type ClothFieldsProps } from './cloth-length.tsx';
 
 /** What was seen of a cloth that the workshop sends in. */
 export function OwnClothFields(form: Omit<ClothFieldsProps, 'per'>) {
