@@ -46,8 +46,9 @@ async function pdfText(content: Buffer): Promise<string> {
 
 /** What a person could read in an answer, also when it is a paper. */
 async function readable(answer: Response): Promise<string> {
-  if (answer.type === 'image/jpeg') return (answer.body as Buffer).toString('latin1');
-  return answer.type === 'application/pdf' ? pdfText(answer.body as Buffer) : answer.text;
+  if (answer.type === 'application/pdf') return pdfText(answer.body as Buffer);
+  // A photograph, or a cutting file.
+  return Buffer.isBuffer(answer.body) ? answer.body.toString('latin1') : answer.text;
 }
 
 const isPaper = (path: string) => path.endsWith('.pdf');
