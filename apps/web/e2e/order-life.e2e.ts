@@ -72,6 +72,7 @@ describe('a cushion order from the question to the inspection', () => {
     const questions = theirs.getByRole('region', { name: 'Questions' });
     await questions.getByRole('button', { name: /^About/ }).click();
     await theirs.getByRole('option', { name: 'Cushion C1' }).click();
+    await questions.getByRole('button', { name: 'About, Cushion C1' }).waitFor();
     await questions.getByLabel('Question').fill('Which side does the camera see?');
     await questions.getByRole('button', { name: 'Ask' }).click();
     await questions.getByText('open', { exact: true }).waitFor();

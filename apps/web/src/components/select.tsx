@@ -42,7 +42,9 @@ export function Select<T extends string | number>({
             <span className="truncate">{chosen?.words ?? 'Choose'}</span>
             <OpenIcon />
           </ListboxButton>
+          {/* Not modal: a list that stays open for any reason never leaves the rest of the page inert. */}
           <ListboxOptions
+            modal={false}
             anchor={{ to: 'bottom start', gap: 4 }}
             className={classNames(OPTIONS_SLIP, 'min-w-(--button-width)')}
           >
