@@ -73,9 +73,11 @@ function boxBase(list: PartList, bench: PieceOf<'bench'>, layout: BenchLayout): 
     grain: 'x',
   });
   if (layout.hasKick) {
+    // A deep kick under a tilted deck meets it lower than the riser does.
+    const kickTop = Math.min(riserFoot, below(kickFrontZMm - PANEL_MM, kickFrontZMm));
     list.box('kick', 'walnut', {
-      sizeMm: [inner, riserFoot, PANEL_MM],
-      centreMm: [middle, riserFoot / 2, kickFrontZMm - PANEL_MM / 2],
+      sizeMm: [inner, kickTop, PANEL_MM],
+      centreMm: [middle, kickTop / 2, kickFrontZMm - PANEL_MM / 2],
       grain: 'x',
     });
   }

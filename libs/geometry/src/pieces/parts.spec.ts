@@ -89,6 +89,19 @@ describe('a bench', () => {
     );
   });
 
+  it('ends a deep kick under a tilted deck where the deck is there, not at the riser', () => {
+    const start = newPiece('bench', 'b1', 'B1', HERE);
+    const bench: PieceOf<'bench'> = {
+      ...start,
+      seatTiltDeg: 5,
+      kick: { depthMm: 200, heightMm: start.deckHeightMm },
+    };
+    const parts = derivePieceParts(bench);
+    const [deck, kick] = (['deck', 'kick'] as const).map((role) => parts.find((part) => part.role === role));
+    if (deck === undefined || kick === undefined) throw new Error('the bench has no box base');
+    expect(Math.abs(overlapDepth(deck, kick))).toBeLessThanOrEqual(TOLERANCE_MM);
+  });
+
   it('splits a long run near equal parts, on board joints, and fills it', () => {
     const bench: PieceOf<'bench'> = { ...newPiece('bench', 'b1', 'B1', HERE), lengthMm: 3000 };
     const cushions = derivePieceParts(bench).filter(({ role }) => role === 'seat-cushion');
