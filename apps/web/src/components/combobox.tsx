@@ -10,6 +10,7 @@ import { classNames } from './class-names.ts';
 import { FIELD_LINE, FieldFrame, type FieldWords } from './field-frame.tsx';
 import { AddIcon, OpenIcon } from './icons.tsx';
 import { OPTION, OPTIONS_SLIP } from './option-styles.ts';
+import { scrollInList } from './scroll-in-list.ts';
 
 export interface ComboboxChoice {
   id: string;
@@ -85,13 +86,13 @@ export function Combobox({
             className={classNames(OPTIONS_SLIP, 'w-(--input-width) empty:invisible')}
           >
             {shown.map((choice) => (
-              <ComboboxOption key={choice.id} value={choice} className={OPTION}>
+              <ComboboxOption key={choice.id} ref={scrollInList} value={choice} className={OPTION}>
                 <span className="flex-1">{choice.words}</span>
                 {choice.detail && <span className="text-sm text-ink-3">{choice.detail}</span>}
               </ComboboxOption>
             ))}
             {onAdd && (
-              <ComboboxOption value={ADD} className={classNames(OPTION, 'text-chalk')}>
+              <ComboboxOption ref={scrollInList} value={ADD} className={classNames(OPTION, 'text-chalk')}>
                 <AddIcon /> {addWords?.(typed.trim()) ?? `Add ${typed.trim()}`}
               </ComboboxOption>
             )}

@@ -1,7 +1,7 @@
 import { render, screen } from '@testing-library/react';
 import userEvent from '@testing-library/user-event';
 import { useState } from 'react';
-import { describe, expect, it } from 'vitest';
+import { describe, expect, it, vi } from 'vitest';
 import { Dialog } from './dialog.tsx';
 import { Select } from './select.tsx';
 
@@ -30,6 +30,17 @@ describe('one of a few', () => {
     await userEvent.click(await screen.findByRole('option', { name: 'Cushion C1' }));
     expect(list()).toBeNull();
     expect(screen.getByRole('button', { name: 'About, Cushion C1' })).toHaveFocus();
+  });
+
+  it('comes into view without moving the page', async () => {
+    const moved = vi.spyOn(Element.prototype, 'scrollIntoView');
+    render(<About />);
+    await open();
+    await userEvent.keyboard('{ArrowDown}');
+    await new Promise(requestAnimationFrame);
+    expect(screen.getByRole('option', { name: 'Cushion C1' })).toHaveAttribute('data-focus');
+    expect(moved).not.toHaveBeenCalled();
+    moved.mockRestore();
   });
 
   it('leaves the rest of the page to be used while its list is open', async () => {

@@ -3,6 +3,7 @@ import { classNames } from './class-names.ts';
 import { FIELD_LINE, FieldFrame, type FieldWords } from './field-frame.tsx';
 import { OpenIcon, TickIcon } from './icons.tsx';
 import { OPTION, OPTIONS_SLIP } from './option-styles.ts';
+import { scrollInList } from './scroll-in-list.ts';
 
 export interface SelectOption<T extends string | number> {
   value: T;
@@ -49,7 +50,7 @@ export function Select<T extends string | number>({
             className={classNames(OPTIONS_SLIP, 'min-w-(--button-width)')}
           >
             {options.map((option) => (
-              <ListboxOption key={option.value} value={option.value} className={OPTION}>
+              <ListboxOption key={option.value} ref={scrollInList} value={option.value} className={OPTION}>
                 <span className="flex w-5 shrink-0 text-chalk">{option.value === value && <TickIcon />}</span>
                 <span className="flex-1">{option.words}</span>
                 {option.detail && <span className="pl-6 text-sm text-ink-3">{option.detail}</span>}
