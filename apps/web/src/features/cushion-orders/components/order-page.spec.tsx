@@ -157,4 +157,23 @@ describe('OrderPage', () => {
     expect(screen.queryByRole('button', { name: /Send|Change|Cancel|Record|Revoke/ })).toBeNull();
     expect(screen.queryByRole('textbox')).toBeNull();
   });
+
+  it('hands out lists and cutting files for the programs of the shop', async () => {
+    const user = userEvent.setup();
+    const asked: string[] = [];
+    server.use(
+      http.get(`${AT}/:file`, ({ params }) => {
+        asked.push(String(params.file));
+        return params.file === 'panels.dxf'
+          ? HttpResponse.json({ code: 'gone', title: 'The revision is gone.' }, { status: 410 })
+          : new HttpResponse('mark');
+      }),
+    );
+    show(ORDER);
+    const files = within(await screen.findByRole('region', { name: 'Files for the shop' }));
+    await user.click(files.getByRole('button', { name: 'Schedule (CSV)' }));
+    await waitFor(() => expect(asked).toContain('schedule.csv'));
+    await user.click(files.getByRole('button', { name: 'Outlines and panels (DXF)' }));
+    expect(await files.findByText('The revision is gone.')).toBeVisible();
+  });
 });

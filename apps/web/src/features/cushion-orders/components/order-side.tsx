@@ -9,6 +9,7 @@ import { useWorkshop } from '@/lib/workshop.ts';
 import { useLinkStep, useMailAgain, useMessages, useWriteMessage, type OrderPath } from '../api.ts';
 import { EVENT_WORDS, type Order } from '../order.ts';
 import { ShopLife } from '../life/shop-life.tsx';
+import { ShopPapers } from './order-papers.tsx';
 import { Thread } from './thread.tsx';
 import { WriteBox } from './write-box.tsx';
 
@@ -107,6 +108,7 @@ export function OrderSide({ path, order }: { path: OrderPath; order: Order }) {
   const who = order.upholsterer?.contactName || order.upholsterer?.name || 'the upholsterer';
   return (
     <aside aria-label="With the upholsterer" className="min-w-0">
+      {order.cushions.length > 0 && <ShopPapers path={path} />}
       <RuleHeading>{order.upholsterer ? `With ${order.upholsterer.name}` : 'Not sent yet'}</RuleHeading>
       {order.acknowledgement && (
         <Notice className="mb-2">

@@ -23,6 +23,13 @@ describe('the order behind a private link', () => {
     expect(await screen.findByRole('heading', { name: 'Dining car, seat cushions' })).toBeVisible();
     expect(screen.getAllByRole('img', { name: /plan with measures/ })).not.toHaveLength(0);
     expect(screen.getAllByText('Plum moquette')[0]).toBeVisible();
+    const paper = within(screen.getByRole('region', { name: 'The paper' }));
+    for (const [name, file] of [
+      ['Drawing pack, PDF', 'spec.pdf'],
+      ['Schedule (CSV)', 'schedule.csv'],
+      ['Outlines and panels (DXF)', 'panels.dxf'],
+    ] as const)
+      expect(paper.getByRole('link', { name })).toHaveAttribute('href', `/api/link/secret-token/${file}`);
   });
 
   it('is in millimetres throughout where the workshop works in them, with inches beside the size', async () => {

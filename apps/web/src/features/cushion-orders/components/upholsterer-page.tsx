@@ -20,6 +20,7 @@ import type { PublicOrder } from '../order.ts';
 import { Acknowledge } from './acknowledge.tsx';
 import { ClosedLink } from './closed-link.tsx';
 import { CushionGroups } from './cushion-groups.tsx';
+import { LinkPapers } from './order-papers.tsx';
 import { Thread } from './thread.tsx';
 import { WriteBox } from './write-box.tsx';
 
@@ -72,12 +73,7 @@ function Opened({ token, order }: { token: string; order: PublicOrder }) {
         )}
       </div>
       <aside className="min-w-0">
-        <RuleHeading>The paper</RuleHeading>
-        <p className="pb-4">
-          <a className="link" href={`/api/link/${encodeURIComponent(token)}/spec.pdf`} download>
-            Drawing pack, PDF
-          </a>
-        </p>
+        <LinkPapers token={token} />
         <RuleHeading>So far</RuleHeading>
         <Thread messages={order.messages} own="upholsterer" />
         <WriteBox
