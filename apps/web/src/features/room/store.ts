@@ -41,8 +41,6 @@ export interface RoomState extends UndoStep {
 
 export type RoomStore = StoreApi<RoomState> & { temporal: StoreApi<TemporalState<UndoStep>> };
 
-const STILL = { moving: null, counted: null };
-
 /** The one store of a set's page. Documents change by `commit` alone: one call, one undo step. */
 export function createRoomStore(document: SetDocument): RoomStore {
   let began = document;
@@ -55,30 +53,35 @@ export function createRoomStore(document: SetDocument): RoomStore {
     return { moving: next, counted: shownDocument(state) };
   }
   const resting = createRest(() => store.getState().rest());
+  /** A movement is over, and nothing comes after it. */
+  function still(): Pick<RoomState, 'moving' | 'counted'> {
+    resting.stop();
+    return { moving: null, counted: null };
+  }
   const store = createStore<RoomState>()(
     temporal(
       (set, get) => ({
         document,
         step: '',
         preview: null,
-        ...STILL,
+        moving: null,
+        counted: null,
         litCellId: null,
         openCellId: null,
-        commit: (next, step) => set({ document: next, step, preview: null, ...STILL }),
+        commit: (next, step) => set({ document: next, step, preview: null, ...still() }),
         commitMoving: (next, step, then) => {
           set({ document: next, step, preview: null, ...move(get(), next) });
           atRest = then;
         },
-        showPreview: (preview) => set({ preview, ...STILL }),
+        showPreview: (preview) => set({ preview, ...still() }),
         showMoving: (moving) => set(move(get(), moving)),
         rest: () => {
-          resting.stop();
           const { moving } = get();
           if (!moving) return;
-          set({ preview: moving === get().document ? null : moving, ...STILL });
+          set({ preview: moving === get().document ? null : moving, ...still() });
           atRest?.(began);
         },
-        load: (next) => set({ document: next, step: '', preview: null, ...STILL }),
+        load: (next) => set({ document: next, step: '', preview: null, ...still() }),
         light: (litCellId) => set({ litCellId }),
         openCell: (openCellId) => set({ openCellId }),
       }),

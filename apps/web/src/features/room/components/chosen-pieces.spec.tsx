@@ -15,7 +15,8 @@ import { useGroupActions } from '../hooks/use-group-actions.ts';
 import { usePieceActions } from '../hooks/use-piece-actions.ts';
 import { createPictureMaker } from '../picture.ts';
 import { RoomContext, type RoomSurroundings } from '../room-context.tsx';
-import { createRoomStore, RoomStoreContext, undoNames, useRoom, type RoomStore } from '../store.ts';
+import { RoomStoreProvider } from '../room-store-provider.tsx';
+import { createRoomStore, undoNames, useRoom, type RoomStore } from '../store.ts';
 import { ChosenPieces } from './chosen-pieces.tsx';
 import { PiecesPanel } from './pieces-panel.tsx';
 
@@ -64,10 +65,10 @@ function open(document: SetDocument = banquette) {
   render(
     <MemoryRouter>
       <RoomContext value={surroundings}>
-        <RoomStoreContext value={store}>
+        <RoomStoreProvider store={store}>
           <Desk />
           <Toaster />
-        </RoomStoreContext>
+        </RoomStoreProvider>
       </RoomContext>
     </MemoryRouter>,
   );

@@ -14,8 +14,9 @@ import { MemoryRouter } from 'react-router-dom';
 import { describe, expect, it } from 'vitest';
 import { createPictureMaker } from '../picture.ts';
 import { AutosaveContext, RoomContext, type RoomSurroundings } from '../room-context.tsx';
+import { RoomStoreProvider } from '../room-store-provider.tsx';
 import { createAutosave, type DraftConflict, type PutOutcome } from '../save/autosave.ts';
-import { createRoomStore, RoomStoreContext } from '../store.ts';
+import { createRoomStore } from '../store.ts';
 import { ConflictScreen } from './conflict-screen.tsx';
 
 const engine = { model: createBodyModel(summary), ruleBook: loadRuleBook(rules) };
@@ -79,11 +80,11 @@ function open() {
   render(
     <MemoryRouter>
       <RoomContext value={surroundings}>
-        <RoomStoreContext value={store}>
+        <RoomStoreProvider store={store}>
           <AutosaveContext value={autosave}>
             <ConflictScreen conflict={conflict} />
           </AutosaveContext>
-        </RoomStoreContext>
+        </RoomStoreProvider>
       </RoomContext>
     </MemoryRouter>,
   );

@@ -13,7 +13,7 @@ import { loadFitEngine } from '../engine.ts';
 import { useOpenedSet } from '../hooks/use-opened-set.ts';
 import { createPictureMaker } from '../picture.ts';
 import { AutosaveContext, RoomContext, type RoomSurroundings } from '../room-context.tsx';
-import { RoomStoreContext } from '../store.ts';
+import { RoomStoreProvider } from '../room-store-provider.tsx';
 
 interface OpenRoomProps {
   path: SetPath;
@@ -86,9 +86,9 @@ export function OpenRoom({ path, children }: OpenRoomProps) {
   }
   return (
     <RoomContext value={surroundings}>
-      <RoomStoreContext value={opened.store}>
+      <RoomStoreProvider store={opened.store}>
         <AutosaveContext value={opened.autosave}>{children}</AutosaveContext>
-      </RoomStoreContext>
+      </RoomStoreProvider>
     </RoomContext>
   );
 }

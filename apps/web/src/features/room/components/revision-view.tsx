@@ -16,7 +16,8 @@ import { useRoomAddress } from '../hooks/use-address.ts';
 import { usePieceActions } from '../hooks/use-piece-actions.ts';
 import { createPictureMaker } from '../picture.ts';
 import { RoomContext, usePicture, type RoomSurroundings } from '../room-context.tsx';
-import { createRoomStore, RoomStoreContext } from '../store.ts';
+import { RoomStoreProvider } from '../room-store-provider.tsx';
+import { createRoomStore } from '../store.ts';
 import { ApprovalForm } from './approval-form.tsx';
 import { KeyPlan } from './key-plan.tsx';
 import { PiecesPanel } from './pieces-panel.tsx';
@@ -84,9 +85,9 @@ function Frozen({ path, setName, revision }: { path: SetPath; setName: string; r
       <ApprovalForm path={path} revision={revision} />
       {surroundings ? (
         <RoomContext value={surroundings}>
-          <RoomStoreContext value={store}>
+          <RoomStoreProvider store={store}>
             <FrozenRoom />
-          </RoomStoreContext>
+          </RoomStoreProvider>
         </RoomContext>
       ) : (
         <LoadingLine words="Drawing the set" />

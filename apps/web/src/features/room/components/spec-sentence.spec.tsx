@@ -8,7 +8,8 @@ import { beforeEach, describe, expect, it } from 'vitest';
 import { useAnnouncement } from '@/lib/announce.ts';
 import { createPictureMaker } from '../picture.ts';
 import { RoomContext, usePiece, type RoomSurroundings } from '../room-context.tsx';
-import { createRoomStore, RoomStoreContext, undoNames, type RoomStore } from '../store.ts';
+import { RoomStoreProvider } from '../room-store-provider.tsx';
+import { createRoomStore, undoNames, type RoomStore } from '../store.ts';
 import { SpecSentence } from './spec-sentence.tsx';
 
 const engine = { model: createBodyModel(summary), ruleBook: loadRuleBook(rules) };
@@ -50,9 +51,9 @@ function open(canEdit = true, opened = document) {
   };
   render(
     <RoomContext value={surroundings}>
-      <RoomStoreContext value={store}>
+      <RoomStoreProvider store={store}>
         <Sentence />
-      </RoomStoreContext>
+      </RoomStoreProvider>
     </RoomContext>,
   );
   return userEvent.setup();

@@ -11,7 +11,8 @@ import { server } from '@/test/server.ts';
 import { usePieceActions } from '../hooks/use-piece-actions.ts';
 import { createPictureMaker } from '../picture.ts';
 import { RoomContext, type RoomSurroundings } from '../room-context.tsx';
-import { createRoomStore, RoomStoreContext, undoNames, useRoom, type RoomStore } from '../store.ts';
+import { RoomStoreProvider } from '../room-store-provider.tsx';
+import { createRoomStore, undoNames, useRoom, type RoomStore } from '../store.ts';
 import { CushionsButton } from './cushions-button.tsx';
 import { foamEffect, withFoam } from './foam-effect.ts';
 // The button fetches it when it is pressed: here it is there already.
@@ -52,9 +53,9 @@ async function open(canEdit = true): Promise<RoomStore> {
   };
   renderPage(
     <RoomContext value={surroundings}>
-      <RoomStoreContext value={store}>
+      <RoomStoreProvider store={store}>
         <Row />
-      </RoomStoreContext>
+      </RoomStoreProvider>
     </RoomContext>,
   );
   await userEvent.click(screen.getByRole('button', { name: 'Cushions' }));

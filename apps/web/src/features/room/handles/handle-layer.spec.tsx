@@ -14,9 +14,10 @@ import { beforeEach, describe, expect, it, vi } from 'vitest';
 import { useAnnouncement } from '@/lib/announce.ts';
 import { createPictureMaker } from '../picture.ts';
 import { RoomContext, usePiece, type RoomSurroundings } from '../room-context.tsx';
+import { RoomStoreProvider } from '../room-store-provider.tsx';
 import { createViewController } from '../scene/view-controller.ts';
 import type { ViewFrame } from '../scene/view-frame.ts';
-import { createRoomStore, RoomStoreContext, undoNames, type RoomStore } from '../store.ts';
+import { createRoomStore, undoNames, type RoomStore } from '../store.ts';
 import HandleLayer from './handle-layer.tsx';
 
 const engine = { model: createBodyModel(summary), ruleBook: loadRuleBook(rules) };
@@ -35,6 +36,7 @@ const FRONT: ViewFrame = {
 };
 
 let store: RoomStore;
+let leave: () => void;
 
 function Layer({ controller }: { controller: ReturnType<typeof createViewController> }) {
   const piece = usePiece(added.pieceId);
@@ -57,13 +59,14 @@ function open(change: Partial<PieceOf<'bench'>> = {}) {
   const controller = createViewController();
   controller.resize({ width: 1500, height: 1000 });
   controller.show(FRONT, false);
-  render(
+  const { unmount } = render(
     <RoomContext value={surroundings}>
-      <RoomStoreContext value={store}>
+      <RoomStoreProvider store={store}>
         <Layer controller={controller} />
-      </RoomStoreContext>
+      </RoomStoreProvider>
     </RoomContext>,
   );
+  leave = unmount;
   return userEvent.setup();
 }
 
@@ -184,6 +187,16 @@ describe('a handle of the selected piece', () => {
     await user.keyboard(keys);
     expect(bench().lengthMm).toBeCloseTo(44 * INCH + (steps * INCH) / 8, 6);
     expect(useAnnouncement.getState().text).toMatch(/^Length three feet /);
+  });
+
+  it('counts nothing any more when the room is left before the step has come to rest', async () => {
+    const user = open();
+    act(() => right().focus());
+    await user.keyboard('{ArrowRight}');
+    expect(store.getState().moving).not.toBeNull();
+    leave();
+    expect(store.getState().moving).toBeNull();
+    expect(bench().lengthMm).toBeCloseTo(44 * INCH + INCH / 8, 6);
   });
 
   it('stops at the limit of its number', () => {

@@ -4,7 +4,8 @@ import userEvent from '@testing-library/user-event';
 import { beforeEach, describe, expect, it } from 'vitest';
 import type { RoomPicture } from '../picture.ts';
 import { RoomContext, type RoomSurroundings } from '../room-context.tsx';
-import { createRoomStore, RoomStoreContext } from '../store.ts';
+import { RoomStoreProvider } from '../room-store-provider.tsx';
+import { createRoomStore } from '../store.ts';
 import Measures from './measures.tsx';
 import { useTapeTool } from './tape-store.ts';
 
@@ -23,11 +24,11 @@ function open(canEdit = true) {
     maker: { picture: pictureOf },
   } as unknown as RoomSurroundings;
   render(
-    <RoomStoreContext value={store}>
+    <RoomStoreProvider store={store}>
       <RoomContext value={room}>
         <Measures />
       </RoomContext>
-    </RoomStoreContext>,
+    </RoomStoreProvider>,
   );
   return store;
 }

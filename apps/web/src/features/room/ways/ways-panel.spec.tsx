@@ -8,8 +8,9 @@ import { afterEach, describe, expect, it, vi } from 'vitest';
 import type { CastMember } from '@/lib/contract.ts';
 import { createPictureMaker } from '../picture.ts';
 import { RoomContext, type RoomSurroundings } from '../room-context.tsx';
+import { RoomStoreProvider } from '../room-store-provider.tsx';
 import { MANNEQUINS } from '../sitters.ts';
-import { createRoomStore, RoomStoreContext } from '../store.ts';
+import { createRoomStore } from '../store.ts';
 import { useShownWay } from './shown-way.ts';
 import type { WaysQuestion } from './ways.worker.ts';
 import { WaysPanel } from './ways-panel.tsx';
@@ -43,9 +44,9 @@ function open(document: SetDocument, reducedMotion = false, cast: readonly CastM
   };
   render(
     <RoomContext value={surroundings}>
-      <RoomStoreContext value={createRoomStore(document)}>
+      <RoomStoreProvider store={createRoomStore(document)}>
         <WaysPanel />
-      </RoomStoreContext>
+      </RoomStoreProvider>
     </RoomContext>,
   );
   return userEvent.setup();
