@@ -1,11 +1,13 @@
 import type { PieceOf } from '../room/document.ts';
 import { formatLength } from '../units/format-length.ts';
 import type { LengthStyle } from '../units/length-style.ts';
+import { phraseText } from '../units/phrase.ts';
 import { HOLD_DOWN_WORDS, type CushionChoice } from './cushion-choice.ts';
 import type { CushionShape } from './cushion-shape.ts';
 import type { RunJoints } from './run-joints.ts';
 import { CLOSURE_WORDS, CONSTRUCTION_WORDS, WELT_WORDS, type CushionMake } from './making/cushion-make.ts';
 import { TUFTING_WORDS, type TuftingChoice } from './tufting-choice.ts';
+import { allWearPhrase } from './wear.ts';
 
 /**
  * A make in words.
@@ -97,7 +99,7 @@ export function cushionChoiceWords(
   kind: 'seat' | 'back',
   style: LengthStyle,
 ): string | undefined {
-  const { make, shape, tufting, cameraSides, holdDown, notes } = choice;
+  const { make, shape, tufting, cameraSides, holdDown, wear, notes } = choice;
   switch (field) {
     case 'make':
       return make && makeWords(make, kind);
@@ -109,6 +111,8 @@ export function cushionChoiceWords(
       return cameraSides && (cameraSides.length === 0 ? 'none' : cameraSides.join(', '));
     case 'holdDown':
       return holdDown && HOLD_DOWN_WORDS[holdDown];
+    case 'wear':
+      return wear && (wear.length === 0 ? 'none' : phraseText(allWearPhrase(wear, kind), style));
     case 'notes':
       return notes;
   }

@@ -2,6 +2,7 @@ import { z } from 'zod';
 import { cushionShapeSchema } from './cushion-shape.ts';
 import { cushionMakeSchema } from './making/cushion-make.ts';
 import { tuftingSchema } from './tufting-choice.ts';
+import { MAX_WEAR, wearAreaSchema } from './wear.ts';
 
 /** An edge of a cushion; left and right as the sitter sees them. */
 export const CUSHION_EDGES = ['back', 'front', 'left', 'right'] as const;
@@ -38,6 +39,8 @@ export const cushionChoiceSchema = z.strictObject({
   /** Edges that the camera sees: no closure belongs there. */
   cameraSides: z.array(z.enum(CUSHION_EDGES)).max(4).optional(),
   holdDown: z.enum(HOLD_DOWNS).optional(),
+  /** Areas that are to look used. */
+  wear: z.array(wearAreaSchema).max(MAX_WEAR).optional(),
   notes: z.string().trim().max(1000).optional(),
 });
 
@@ -50,5 +53,6 @@ export const CUSHION_CHOICE_WORDS: Record<keyof CushionChoice, string> = {
   tufting: 'Tufting',
   cameraSides: 'Camera sides',
   holdDown: 'Hold-down',
+  wear: 'Marked wear',
   notes: 'Notes',
 };

@@ -7,6 +7,7 @@ import type { CushionMake } from './making/cushion-make.ts';
 import type { CushionPanels } from './making/cut-panels.ts';
 import type { TuftingKind } from './tufting-choice.ts';
 import type { FullnessRule } from './tufting.ts';
+import type { WearArea } from './wear.ts';
 
 /** What an edge of a cushion meets. */
 export type EdgeMeets =
@@ -123,6 +124,8 @@ export interface CushionSpec {
   /** Edges that the camera sees. */
   cameraSides: CushionEdge[];
   holdDown?: HoldDown;
+  /** Areas that are to look used. */
+  wear?: WearArea[];
   notes?: string;
 }
 

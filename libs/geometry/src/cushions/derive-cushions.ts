@@ -101,6 +101,7 @@ function cushionOf(
     datum,
     cameraSides: choice.cameraSides ?? [],
     ...(choice.holdDown && { holdDown: choice.holdDown }),
+    ...(choice.wear?.length && { wear: choice.wear }),
     ...(choice.notes && { notes: choice.notes }),
   };
   const onJoints = piece.kind === 'bench' && piece.upholstery.buttons.alignTo === 'joints';

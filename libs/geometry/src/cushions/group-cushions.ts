@@ -2,6 +2,7 @@ import type { OutlineCorner } from '../outlines/outline.ts';
 import type { CushionEdge } from './cushion-choice.ts';
 import type { CushionGroup, CushionSpec } from './cushion-spec.ts';
 import { mirroredOutline } from './mirrored-shape.ts';
+import { mirroredWear } from './wear.ts';
 
 /** Lengths are compared on a grid of 1/64 in: fractions of an inch lie on it, so noise of the last digit never parts two. */
 const GRID_MM = 25.4 / 64;
@@ -38,6 +39,7 @@ function likeness(spec: CushionSpec, mirrored: boolean): string {
     boardLinesMm,
     cameraSides: spec.cameraSides.map(edge).sort(),
     holdDown: spec.holdDown,
+    wear: mirrored ? spec.wear?.map(mirroredWear) : spec.wear,
     notes: spec.notes,
   };
   return JSON.stringify(shown, (_key, value: unknown) =>

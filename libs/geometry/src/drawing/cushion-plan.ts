@@ -2,6 +2,8 @@ import type { CushionEdge } from '../cushions/cushion-choice.ts';
 import type { CushionSpec, EdgeMeets } from '../cushions/cushion-spec.ts';
 import { buttonSpots } from '../cushions/cushion-warnings.ts';
 import { closurePath } from '../cushions/making/edge-strip.ts';
+import { wearHatch, wearRectangle } from '../cushions/wear-hatch.ts';
+import { wearMark } from '../cushions/wear.ts';
 import { offsetFault, offsetOutline, outlinePoints, type OutlineCorner } from '../outlines/outline.ts';
 import { WELT_MM } from './cushion-views.ts';
 import { datumChain, dimensionChain } from './dimension-chain.ts';
@@ -37,6 +39,7 @@ export function cushionPlan(spec: CushionSpec, labelMm: number): Drawing {
       dashed: true,
     })),
     { kind: 'polygon', points: onPage(spec.outline, d), pen: 'edge', fill: 'none' },
+    ...wearShapes(spec, labelMm),
     ...seamShapes(spec),
     ...closureShapes(spec, labelMm),
     ...wallShapes(spec, labelMm),
@@ -56,6 +59,24 @@ export function cushionPlan(spec: CushionSpec, labelMm: number): Drawing {
 /** Outlines run anticlockwise with y up the page; drawings have it down. */
 const onPage = (corners: readonly OutlineCorner[], depthMm: number): PagePoint[] =>
   outlinePoints(corners, 0.5).map(([x, y]): PagePoint => [x, depthMm - y]);
+
+/** What is to look used, hatched and numbered; a number stands in a corner that no edge is named in. */
+function wearShapes(spec: CushionSpec, labelMm: number): DrawShape[] {
+  const d = spec.finishedMm.depthMm;
+  return (spec.wear ?? []).flatMap((area, i): DrawShape[] => {
+    const { x0, y1 } = wearRectangle(spec, area);
+    const lines = wearHatch(spec, area, labelMm / 4);
+    if (lines.length === 0) return [];
+    return [
+      ...lines.map((line): DrawShape => ({
+        kind: 'polyline',
+        points: line.map(([x, y]): PagePoint => [x, d - y]),
+        pen: 'hair',
+      })),
+      { kind: 'text', at: [x0 + labelMm / 2, d - y1 + labelMm / 3], text: wearMark(i), anchor: 'middle' },
+    ];
+  });
+}
 
 /** The welt just within the edge, where the outline leaves room for it. */
 function seamShapes({ outline, finishedMm: { depthMm: d } }: CushionSpec): DrawShape[] {

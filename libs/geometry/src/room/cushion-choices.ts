@@ -2,6 +2,7 @@ import type { CushionChoice } from '../cushions/cushion-choice.ts';
 import { cushionKey, cushionKeyParts } from '../cushions/cushion-key.ts';
 import { cushionRuns, type CushionedPiece } from '../cushions/cushion-runs.ts';
 import { mirroredShape } from '../cushions/mirrored-shape.ts';
+import { mirroredWear } from '../cushions/wear.ts';
 import type { Piece, SetDocument } from './document.ts';
 
 type Choices = NonNullable<SetDocument['cushions']>;
@@ -127,11 +128,12 @@ function choicesOf(choices: SetDocument['cushions'], pieceId: string) {
 const OTHER_SIDE = { left: 'right', right: 'left', back: 'back', front: 'front' } as const;
 
 function mirroredChoice(choice: CushionChoice): CushionChoice {
-  const { make, shape, cameraSides } = choice;
+  const { make, shape, cameraSides, wear } = choice;
   return {
     ...choice,
     ...(make && { make: { ...make, closureEdge: OTHER_SIDE[make.closureEdge] } }),
     ...(shape && { shape: mirroredShape(shape) }),
     ...(cameraSides && { cameraSides: cameraSides.map((side) => OTHER_SIDE[side]) }),
+    ...(wear && { wear: wear.map(mirroredWear) }),
   };
 }
