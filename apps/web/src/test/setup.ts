@@ -1,5 +1,5 @@
 import '@testing-library/jest-dom/vitest';
-import { cleanup } from '@testing-library/react';
+import { cleanup, configure } from '@testing-library/react';
 import { afterAll, afterEach, beforeAll } from 'vitest';
 import { server } from './server.ts';
 
@@ -12,6 +12,9 @@ globalThis.ResizeObserver ??= class {
 if (!('scrollIntoView' in Element.prototype)) {
   Object.assign(Element.prototype, { scrollIntoView: () => undefined });
 }
+
+// A busy machine takes its time over a page that is loaded when it is asked for.
+configure({ asyncUtilTimeout: 5000 });
 
 beforeAll(() => server.listen({ onUnhandledRequest: 'error' }));
 afterEach(() => {

@@ -100,4 +100,15 @@ describe('a hand that moves', () => {
     expect(counted).not.toHaveBeenCalled();
     expect(shownDocument(store.getState())).toEqual(set('two'));
   });
+
+  it('leaves nothing waiting once it is over', () => {
+    const store = createRoomStore(set('first'));
+    const { commit, commitMoving, showMoving, showPreview } = store.getState();
+    for (const over of [() => showPreview(null), () => commit(set('there'), 'Moved')]) {
+      showMoving(set('way'));
+      commitMoving(set('way'), 'Moved', () => undefined);
+      over();
+      expect(vi.getTimerCount()).toBe(0);
+    }
+  });
 });
