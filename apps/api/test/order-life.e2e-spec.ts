@@ -1,7 +1,9 @@
 import { afterAll, beforeAll, describe, expect, it, jest } from '@jest/globals';
+import { chooseCushion, deriveCushions, type SetDocument } from '@settlewright/geometry';
 import { findMail } from './factories/mails';
 import { createIssuedSet, issue, type IssuedSet } from './factories/orders';
 import { type LifeBody, SentOrders, type SentTo } from './factories/sent-orders';
+import { paperText } from './factories/papers';
 import { as, createMember, type Person } from './factories/people';
 import { startTestApp, type TestApp } from './test-app';
 
@@ -174,10 +176,76 @@ describe('the life of a cushion order', () => {
       expect(life.agreement).toEqual({ upholsterer: null, workshop: null });
       expect(life.earlierRevision).toBe('A');
       expect(life.changes).toEqual([
-        { mark: null, field: 'tolerance', beforeMm: 6.35, afterMm: 3 },
-        { mark: null, field: 'cover', before: 'plum moquette', after: 'green cord' },
+        { mark: null, field: 'tolerance', before: [{ mm: 6.35 }], after: [{ mm: 3 }] },
+        {
+          ...{ mark: null, field: 'cover' },
+          before: [{ text: 'plum moquette' }],
+          after: [{ text: 'green cord' }],
+        },
       ]);
       expect(life.quotes).toMatchObject([{ inForce: false }]);
+    });
+
+    it('says make, outline, joints, tufting and wear of another revision, and asks for a new word', async () => {
+      const order = await agreed();
+      const set = `${made.production}/sets/${made.setId}`;
+      const { body } = await as(test, owner).get(`${set}/draft`).expect(200);
+      const { number, document } = body as { number: number; document: SetDocument };
+      const cushion = deriveCushions(document).find(({ mark }) => mark === order.cushion.mark)!;
+      const changed = chooseCushion(document, cushion.key, {
+        make: { ...cushion.make, welt: 'bias' },
+        shape: { notches: [{ edge: 'back', fromMm: 0, widthMm: 100, depthMm: 50 }] },
+        tufting: {
+          ...{ kind: 'biscuit', tuftMm: { widthMm: 127, heightMm: 127 } },
+          ...{ borderMm: 76.2, fullness: 'foam-thickness' },
+        },
+        wear: [{ place: 'left-end', look: 'patch' }],
+      });
+      const saved = await as(test, owner)
+        .put(`${set}/draft`)
+        .send({ baseNumber: number, document: changed })
+        .expect(200);
+      const letter = await issue(test, owner, set, (saved.body as { number: number }).number);
+      await as(test, owner).patch(order.path).send({ revisionLetter: letter }).expect(200);
+      await byShop(order, 'send', { upholstererId: order.upholstererId });
+      const life = (await as(test, null).get(`/link/${order.token}/life`).expect(200)).body as LifeBody;
+      const own = (
+        life.changes as { mark: string; field: string; after: object[]; outlines?: object }[]
+      ).filter(({ mark }) => mark === order.cushion.mark);
+      expect(own.map(({ field }) => field)).toEqual(
+        expect.arrayContaining(['make', 'outline', 'tufting', 'wear']),
+      );
+      const outline = own.find(({ field }) => field === 'outline')!;
+      expect(outline.after).toContainEqual({ mm: 50 });
+      expect(outline.outlines).toMatchObject({ before: { length: 4 }, after: { length: 6 } });
+      expect(life.agreement).toEqual({ upholsterer: null, workshop: null });
+      expect(await stateOf(order)).toBe('sent');
+    });
+  });
+
+  describe('the pack of an order', () => {
+    const boxOf = (pdf: Buffer) => /\/MediaBox \[([^\]]*)\]/.exec(pdf.toString('latin1'))?.[1];
+    const pack = async (at: string, who: Person | null) =>
+      (await as(test, who).get(at).responseType('blob').expect(200)).body as Buffer;
+
+    it('is on the paper and in the units that its upholsterer prefers, unless another is asked for', async () => {
+      const order = await orders.send({ units: 'millimetres', paper: 'letter' });
+      const plain = await orders.send();
+      const shown = (await as(test, null).get(`/link/${order.token}`).expect(200)).body as object;
+      expect(shown).toMatchObject({ units: 'millimetres', paper: 'letter' });
+      expect((await as(test, null).get(`/link/${plain.token}`).expect(200)).body).toMatchObject({
+        paper: 'a4',
+      });
+      const theirs = await pack(`/link/${order.token}/spec.pdf`, null);
+      const asked = await pack(`/link/${order.token}/spec.pdf?paper=a4`, null);
+      expect(boxOf(theirs)).toMatch(/^0 0 792/);
+      expect(boxOf(asked)).toMatch(/^0 0 841/);
+      expect(boxOf(await pack(`${order.path}/spec.pdf`, owner))).toBe(boxOf(theirs));
+      expect(await paperText(theirs)).toMatch(/95\smm/);
+      expect(
+        await paperText(await pack(`/link/${order.token}/spec.pdf?units=feet-inches&roundTo=16`, null)),
+      ).toContain('″');
+      await as(test, null).get(`/link/${order.token}/spec.pdf?paper=a3`).expect(400);
     });
   });
 
@@ -204,8 +272,13 @@ describe('the life of a cushion order', () => {
       expect(await read(order)).toMatchObject({ sent: { changedSince: false } });
       const life = (await as(test, null).get(`/link/${order.token}/life`).expect(200)).body as LifeBody;
       expect(life.changes).toEqual([
-        { mark: null, field: 'cloths', before: '', after: expect.stringContaining('1400 mm wide') },
+        { mark: null, field: 'cloths', before: [], after: expect.arrayContaining([{ mm: 1400 }]) },
       ]);
+      const shown = (await as(test, null).get(`/link/${order.token}`).expect(200)).body as {
+        covers: { name: string; widthMm: number }[];
+      };
+      expect(shown.covers).toMatchObject([{ name: 'plum moquette', widthMm: 1400 }]);
+      expect(JSON.stringify(shown.covers)).not.toMatch(/price|EUR/);
       const priced = { ...CLOTH, cushionMarks: [order.cushion.mark], pricePerMetreMinor: 5200 };
       await change(order, [priced]);
       expect(await read(order)).toMatchObject({ covers: [priced], sent: { changedSince: false } });

@@ -13,11 +13,13 @@ const OTHER_MEMBER = 'Quentin Otherhand';
 
 const PUBLIC_FIELDS = [
   'acknowledgement',
+  'covers',
   'cushions',
   'linkExpiresAt',
   'messages',
   'neededBy',
   'number',
+  'paper',
   'productionName',
   'revisionIssuedAt',
   'revisionLetter',

@@ -5,6 +5,7 @@ import {
   HttpCode,
   Param,
   Post,
+  Query,
   Req,
   StreamableFile,
   UseInterceptors,
@@ -12,6 +13,7 @@ import {
 import { ApiOkResponse, ApiProduces, ApiTags } from '@nestjs/swagger';
 import type { Request } from 'express';
 import { Access } from '../common/access.decorator';
+import { PackQuery } from './dto/pack-query.dto';
 import { PublicOrderDto } from './dto/public-order.dto';
 import { AcknowledgeDto, WriteMessageDto } from './dto/write-order.dto';
 import { LinkLimits } from './link-limits';
@@ -44,10 +46,14 @@ export class LinkController {
   @Get('spec.pdf')
   @ApiProduces('application/pdf')
   @ApiOkResponse({ schema: { type: 'string', format: 'binary' } })
-  async specPdf(@Param('token') token: string, @Req() request: Request): Promise<StreamableFile> {
+  async specPdf(
+    @Param('token') token: string,
+    @Req() request: Request,
+    @Query() wanted: PackQuery,
+  ): Promise<StreamableFile> {
     await this.limits.reading(request);
     const { order, sent } = await this.links.open(token);
-    return pdfFile(await this.paper.pack(order, sent), order.number, sent.revisionLetter);
+    return pdfFile(await this.paper.pack(order, sent, wanted), order.number, sent.revisionLetter);
   }
 
   @Post('acknowledge')

@@ -78,9 +78,9 @@ export function sameContent(a: OrderContent, b: OrderContent): boolean {
       SPEC_KEYS.map((key) => spec[key]),
       toleranceOf({ toleranceMm }),
     ]);
-  return plain(a) === plain(b) && isDeepStrictEqual(unpriced(a), unpriced(b));
+  return plain(a) === plain(b) && isDeepStrictEqual(unpriced(coversOf(a)), unpriced(coversOf(b)));
 }
 
 /** What a workshop pays for its cloth is no matter of the upholsterer, and no reason to send an order again. */
-const unpriced = (content: OrderContent) =>
-  coversOf(content).map((cover) => ({ ...cover, pricePerMetreMinor: undefined, currency: undefined }));
+export const unpriced = (covers: readonly OrderCover[]): OrderCover[] =>
+  covers.map((cover) => ({ ...cover, pricePerMetreMinor: undefined, currency: undefined }));

@@ -10,6 +10,8 @@ import type { CushionOrder } from './entities/cushion-order.entity';
 import { IssuedSets } from './issued-sets.service';
 import { markedSections } from './marked-sections';
 import { coversOf, type OrderContent, toleranceOf } from './order-content';
+import type { PackQuery } from './dto/pack-query.dto';
+import { packStyle } from './pack-style';
 import { bagLabels, specCushions } from './spec-cushions';
 
 /** Room for a mark that moves off its cushion. */
@@ -28,12 +30,12 @@ export class OrderPaper {
     @InjectSettings() private readonly config: Settings,
   ) {}
 
-  async pack(order: CushionOrder, content: OrderContent): Promise<Buffer> {
-    return this.press.draw(await this.data(order, content));
+  async pack(order: CushionOrder, content: OrderContent, wanted: PackQuery = {}): Promise<Buffer> {
+    return this.press.draw(await this.data(order, content, wanted));
   }
 
   /** All that paper, list and cutting file show of an order. */
-  async data(order: CushionOrder, content: OrderContent): Promise<SpecPackData> {
+  async data(order: CushionOrder, content: OrderContent, wanted: PackQuery = {}): Promise<SpecPackData> {
     const { workshopId, productionId, setId } = order;
     const member = { workshopId, userId: order.createdById, role: 'designer' as const };
     const [issued, production, workshop] = await Promise.all([
@@ -47,8 +49,7 @@ export class OrderPaper {
     const assumedCloths = said.length > 0 ? [] : covers.map(({ name }) => name);
     const model = orderModel({ cushions, covers, rules: issued.cushionRules });
     return {
-      paper: workshop.paper,
-      units: { system: production.units, roundTo: production.roundTo },
+      ...packStyle(order, production, workshop, wanted),
       production: production.name,
       set: order.set?.name ?? '',
       workshop: { name: workshop.name, telephone: workshop.telephone },

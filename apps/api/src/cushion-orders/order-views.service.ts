@@ -21,10 +21,11 @@ import type { LinkedOrder } from './link.service';
 import { ofItsUpholsterer } from './order-access';
 import { acknowledgementOf } from './order-agreement';
 import { contactOf } from './order-contact';
-import { sameContent } from './order-content';
+import { coversOf, sameContent, unpriced } from './order-content';
 import { linkState } from './order-links';
 import { OUTGOING_KINDS } from './order-mail';
 import { mayChange, maySend, recordableAfter } from './order-states';
+import { packStyle } from './pack-style';
 
 const UNANSWERED = `
   SELECT open.order_id AS "orderId", count(*)::int AS count
@@ -123,6 +124,7 @@ export class OrderViews {
       }),
       acknowledgementOf(manager, order),
     ]);
+    const style = packStyle(order, production, workshop);
     return {
       workshop: { name: workshop.name, telephone: workshop.telephone, contactName: contact.name },
       number: order.number,
@@ -134,11 +136,13 @@ export class OrderViews {
       revisionLetter: sent.revisionLetter,
       revisionIssuedAt: issued.issuedAt.toISOString(),
       neededBy: sent.neededBy,
-      units: production.units,
-      roundTo: production.roundTo,
+      units: style.units.system,
+      roundTo: style.units.roundTo,
+      paper: style.paper,
       sentAt: sent.at,
       spec: sent.spec,
       cushions: this.issued.select(issued, sent.cushionMarks),
+      covers: unpriced(coversOf(sent)),
       messages: messages.map((message) => ({
         side: message.side,
         // Of the workshop's people the other side knows only the contact.

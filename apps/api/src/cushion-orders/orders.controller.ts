@@ -5,6 +5,7 @@ import { Access, Member, type MemberInfo } from '../common/access.decorator';
 import { IdParam } from '../common/id-param';
 import { type Page, PageOf, PageQuery } from '../common/page.dto';
 import { OrderDto, OrderMessageDto, OrderSummaryDto } from './dto/order.dto';
+import { PackQuery } from './dto/pack-query.dto';
 import {
   CancelOrderDto,
   CreateOrderDto,
@@ -87,11 +88,12 @@ export class OrdersController {
     @Member() member: MemberInfo,
     @IdParam('productionId') productionId: string,
     @IdParam('orderId') orderId: string,
+    @Query() wanted: PackQuery,
     @Res({ passthrough: true }) response: Response,
   ): Promise<StreamableFile> {
     const order = await this.orders.find(placeOf(member, productionId, orderId));
     response.set('Cache-Control', 'private, no-cache');
-    return pdfFile(await this.paper.pack(order, order), order.number, order.revisionLetter);
+    return pdfFile(await this.paper.pack(order, order, wanted), order.number, order.revisionLetter);
   }
 
   @Post(':orderId/send')

@@ -1,10 +1,12 @@
 import {
+  allWearPhrase,
   curveWords,
   cushionWarningWords,
   formatLength,
   HOLD_DOWN_WORDS,
   lengthStep,
   outlineExtent,
+  phraseText,
   TUFTING_WORDS,
 } from '@settlewright/geometry';
 import { type OrderPages, PAD } from './order-pages';
@@ -161,6 +163,7 @@ function factsOf(cushion: SpecCushion, pack: SpecPack): Fact[] {
     ],
     ['Template', row.needsTemplate ? 'at full size in this pack' : ''],
     ['Look at', spec.warnings.map((warning) => cushionWarningWords(warning, units)).join(' ')],
+    ['Wear', phraseText(allWearPhrase(spec.wear ?? [], cushion.kind), units)],
     ['Notes', spec.notes ?? ''],
   ];
   return facts

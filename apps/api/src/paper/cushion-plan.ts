@@ -3,6 +3,7 @@ import {
   offsetOutline,
   type OutlineCorner,
   outlinePoints,
+  outlineStretches,
   type Point2,
 } from '@settlewright/geometry';
 import { drawClothWay } from './cloth-way';
@@ -11,6 +12,7 @@ import { MOST_CHAINED_CORNERS } from './outline-stops';
 import { type CushionPlan, onPaper, planBox, type PlanPlace } from './plan-place';
 import { PEN, type Sheet } from './sheet';
 import { TakenSpace, type WordPlace } from './taken-space';
+import { hatchWorn, numberWorn } from './worn-areas';
 
 const BUTTON_MM = 1.35;
 const SAG_MM = 0.5;
@@ -27,11 +29,14 @@ interface Figure {
 /** A cushion from above by its real outline, back edge up, with seams, closure, buttons, words and chains. */
 export function drawCushionPlan(sheet: Sheet, plan: CushionPlan, place: PlanPlace, chains: PlanChains): void {
   const figure: Figure = { sheet, plan, place, at: onPaper(plan, place), taken: new TakenSpace() };
+  hatchWorn(figure);
   drawBoardLines(figure);
   drawOutline(figure);
   drawWall(figure, chains);
+  keepNotchesClear(figure);
   drawClosure(figure);
   for (const spot of plan.buttons) drawButton(figure, figure.at(spot));
+  numberWorn(figure, figure.taken);
   nameEdges(figure);
   drawClothWay(sheet, plan.cloth, boxOnPaper(figure), figure.taken);
   nameRadii(figure);
@@ -50,6 +55,20 @@ function drawOutline({ sheet, plan, place, at }: Figure): void {
   sheet.path(path(plan.outline), { pen: PEN.edge, closed: true });
   const inner = offsetOutline(plan.outline, -0.9 / place.factor);
   if (!offsetFault(plan.outline, inner)) sheet.path(path(inner), { pen: PEN.hair, closed: true });
+}
+
+/** No words stand on the lines of a notch. */
+function keepNotchesClear({ plan, at, taken }: Figure): void {
+  for (const stretch of outlineStretches(plan.outline)) {
+    if (stretch.kind === 'arc' || stretch.edge !== 'notch') continue;
+    const [[x1, y1], [x2, y2]] = [at(stretch.from), at(stretch.to)];
+    taken.take({
+      x: Math.min(x1, x2) - 0.4,
+      y: Math.min(y1, y2) - 0.4,
+      width: Math.abs(x2 - x1) + 0.8,
+      height: Math.abs(y2 - y1) + 0.8,
+    });
+  }
 }
 
 function drawBoardLines(figure: Figure): void {

@@ -125,6 +125,7 @@ function planOf(cushion: SpecCushion, { units }: SpecPack): CushionPlan {
           }
         : null,
     cloth,
+    wear: spec.wear ?? [],
   };
 }
 

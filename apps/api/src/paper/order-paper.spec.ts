@@ -3,7 +3,7 @@ import { mkdtempSync, rmSync, writeFileSync } from 'node:fs';
 import { tmpdir } from 'node:os';
 import { join } from 'node:path';
 import { afterAll, describe, expect, it } from '@jest/globals';
-import { formatLength, layCloth, type SetDocument } from '@settlewright/geometry';
+import { formatLength, layCloth, type LengthStyle, type SetDocument } from '@settlewright/geometry';
 import {
   arrangement,
   chosen,
@@ -15,12 +15,14 @@ import {
 } from '../../test/factories/order-packs';
 import { paperText, paperWords, type PlacedWord } from '../../test/factories/papers';
 import { laidSpecPdf } from './laid-pack';
+import { Sheet } from './sheet';
 import type { SpecPackData } from './spec-pack';
 import { SpecPress } from './spec-press';
 import { tileSpace } from './template-sheets';
 import { templateLines, templateTiles } from './template-tiles';
 
 const TRIES = 40;
+const METRIC: LengthStyle = { system: 'millimetres', roundTo: 16 };
 const inches = (mm: number) => formatLength(mm, INCHES);
 const bare = (mm: number) => inches(mm).replace('″', '');
 
@@ -80,14 +82,45 @@ describe('the paper of an order', () => {
     ['of a back with fourteen buttons to a row', fourteenButtons],
   ];
 
-  for (const paper of ['a4', 'letter'] as const) {
-    it.each(sets)(`%s has no word on another, on ${paper}`, async (_, document) => {
-      const data = orderPack(document(), { paper });
+  const sheets = [
+    { paper: 'a4', units: INCHES },
+    { paper: 'letter', units: INCHES },
+    { paper: 'a4', units: METRIC },
+    { paper: 'letter', units: METRIC },
+  ] as const;
+  for (const { paper, units } of sheets) {
+    it.each(sets)(`%s has no word on another, on ${paper} in ${units.system}`, async (_, document) => {
+      const data = orderPack(document(), { paper, units });
       const words = await paperWords(laidSpecPdf(data, TRIES));
       expect(words.length).toBeGreaterThan(300);
       expect(overlaps(words)).toEqual([]);
     });
   }
+
+  it('hatches what is to look used, and says it by its number', async () => {
+    const [worn] = orderPack(fourWays()).model.schedule;
+    const words = await paperWords(laidSpecPdf(orderPack(fourWays()), TRIES));
+    const page = words.find(({ text }) => text === 'A2')!.page;
+    const here = words.filter((word) => word.page === page).map(({ text }) => text);
+    expect(here.filter((text) => text === 'A2')).toHaveLength(2);
+    expect(here.join(' ')).toMatch(/A1 front edge: worn through; A2 .* tea, an old ring/);
+    const plain = orderPack(chosen(fourWays(), worn!.marks[0]!, { wear: undefined }));
+    const lines = (data: SpecPackData) => {
+      let count = 0;
+      const { line } = Sheet.prototype;
+      Sheet.prototype.line = function (this: Sheet, ...drawn: Parameters<Sheet['line']>) {
+        if (drawn[4]?.grey === 120) count += 1;
+        line.apply(this, drawn);
+      };
+      try {
+        laidSpecPdf(data, TRIES);
+      } finally {
+        Sheet.prototype.line = line;
+      }
+      return count;
+    };
+    expect(lines(orderPack(fourWays()))).toBeGreaterThan(lines(plain) + 20);
+  });
 
   it('has the sets that it is looked at with', () => {
     expect(orderPack(fourteenButtons()).model.buttons[0]!.columns).toHaveLength(14);

@@ -1,4 +1,4 @@
-import type { CushionEdge, OutlineCorner, Point2 } from '@settlewright/geometry';
+import type { CushionEdge, OutlineCorner, Point2, WearArea } from '@settlewright/geometry';
 
 /** A cushion laid flat, in real millimetres. Page left and right, since the paper is read that way. */
 export interface CushionPlan {
@@ -22,6 +22,8 @@ export interface CushionPlan {
   closure: { edge: CushionEdge; path: readonly Point2[]; wrapMm: number; words: string } | null;
   edges: { back: string; front: string; left: string; right: string };
   cloth: ClothWay | null;
+  /** Areas that are to look used. */
+  wear: readonly WearArea[];
 }
 
 /** How the cloth lies on a cushion. */

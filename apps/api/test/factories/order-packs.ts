@@ -50,6 +50,15 @@ export function fourWays(): SetDocument {
     },
     cameraSides: ['front'],
     holdDown: 'hook-and-loop',
+    wear: [
+      { place: 'front-edge', look: 'worn-through' },
+      {
+        place: 'area',
+        areaMm: { fromEnd: 'left', fromSideMm: 90, fromFrontMm: 140, widthMm: 220, depthMm: 130 },
+        look: 'stain',
+        note: 'tea, an old ring',
+      },
+    ],
     notes: '=Rub the front edge.',
   });
   document = chosen(document, 'C2', {

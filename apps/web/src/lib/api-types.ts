@@ -4195,6 +4195,29 @@ export interface components {
             wallMark?: string;
             toSeamMm: number;
         };
+        WearRectangleDto: {
+            /**
+             * @description as the sitter sees it
+             * @enum {string}
+             */
+            fromEnd: "left" | "right";
+            fromSideMm: number;
+            fromFrontMm: number;
+            widthMm: number;
+            depthMm: number;
+        };
+        WearAreaDto: {
+            /**
+             * @description left and right as the sitter sees them
+             * @enum {string}
+             */
+            place: "front-edge" | "back-edge" | "left-end" | "right-end" | "middle" | "whole" | "area";
+            /** @description of a place that is an area of its own */
+            areaMm?: components["schemas"]["WearRectangleDto"];
+            /** @enum {string} */
+            look: "fade" | "worn-through" | "stain" | "patch" | "other";
+            note?: string;
+        };
         CushionDto: {
             mark: string;
             key: string;
@@ -4223,6 +4246,8 @@ export interface components {
             cameraSides: ("back" | "front" | "left" | "right")[];
             /** @enum {string} */
             holdDown?: "none" | "non-slip-mesh" | "hook-and-loop" | "snaps" | "turn-buttons" | "french-cleat" | "keyhole-plates";
+            /** @description areas that are to look used */
+            wear?: components["schemas"]["WearAreaDto"][];
             notes?: string;
         };
         SentDto: {
@@ -4370,19 +4395,27 @@ export interface components {
             text: string;
         };
         /** @enum {string} */
-        OrderChangedField: "revision" | "title" | "needed-by" | "cushions" | "tolerance" | "cloths" | "cover" | "foam" | "welt" | "closure" | "fixing" | "buttons" | "notes" | "flammability" | "width" | "depth" | "thickness" | "foam-grade" | "hand" | "button-count" | "button-places";
+        OrderChangedField: "revision" | "title" | "needed-by" | "cushions" | "tolerance" | "cloths" | "cover" | "foam" | "welt" | "closure" | "fixing" | "buttons" | "notes" | "flammability" | "width" | "depth" | "thickness" | "make" | "outline" | "joints" | "curve" | "foam-grade" | "hand" | "tufting" | "button-count" | "button-places" | "camera" | "hold-down" | "wear" | "cushion-notes";
+        PhrasePartDto: {
+            text?: string;
+            mm?: number;
+            densityKgM3?: number;
+            firmnessN?: number;
+        };
+        ChangedOutlineDto: {
+            before: components["schemas"]["OutlineCornerDto"][];
+            after: components["schemas"]["OutlineCornerDto"][];
+        };
         OrderChangeDto: {
             /** @description null: the order itself */
             mark: string | null;
             field: components["schemas"]["OrderChangedField"];
-            /** @description of sizes */
-            beforeMm?: number;
-            /** @description of sizes */
-            afterMm?: number;
-            /** @description of all else */
-            before?: string;
-            /** @description of all else */
-            after?: string;
+            /** @description empty: nothing was said */
+            before: components["schemas"]["PhrasePartDto"][];
+            /** @description empty: nothing is said */
+            after: components["schemas"]["PhrasePartDto"][];
+            /** @description of an outline */
+            outlines?: components["schemas"]["ChangedOutlineDto"];
         };
         OrderWordDto: {
             name: string;
@@ -4669,10 +4702,17 @@ export interface components {
             units: "feet-inches" | "decimal-inches" | "millimetres";
             /** @enum {number} */
             roundTo: 16 | 8;
+            /**
+             * @description of the drawing pack, unless another is asked for
+             * @enum {string}
+             */
+            paper: "a4" | "letter";
             /** Format: date-time */
             sentAt: string;
             spec: components["schemas"]["OrderSpecDto"];
             cushions: components["schemas"]["CushionDto"][];
+            /** @description its cloths, without what the workshop pays for them */
+            covers: components["schemas"]["OrderCoverDto"][];
             messages: components["schemas"]["PublicMessageDto"][];
             acknowledgement: components["schemas"]["AcknowledgementDto"] | null;
             /**
@@ -8386,7 +8426,11 @@ export interface operations {
     };
     Orders_specPdf: {
         parameters: {
-            query?: never;
+            query?: {
+                paper?: "a4" | "letter";
+                units?: "feet-inches" | "decimal-inches" | "millimetres";
+                roundTo?: 16 | 8;
+            };
             header?: never;
             path: {
                 productionId: string;
@@ -9342,7 +9386,11 @@ export interface operations {
     };
     Link_specPdf: {
         parameters: {
-            query?: never;
+            query?: {
+                paper?: "a4" | "letter";
+                units?: "feet-inches" | "decimal-inches" | "millimetres";
+                roundTo?: 16 | 8;
+            };
             header?: never;
             path: {
                 token: string;

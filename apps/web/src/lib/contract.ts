@@ -11,6 +11,7 @@ export type Session = Schema['SessionDto'];
 export type SessionUser = Schema['UserDto'];
 export type Membership = Schema['WorkshopOfUserDto'];
 export type Workshop = Schema['WorkshopDto'];
+export type Paper = Workshop['paper'];
 export type Member = Schema['MemberDto'];
 export type Invitation = Schema['InvitationDto'];
 /** What the holder of an invitation sees before joining. */

@@ -75,10 +75,10 @@ describe('a marked area', () => {
   it('is said with its number, its place and its look, in the units of the reader', () => {
     const all = [{ place: 'front-edge', look: 'worn-through' } as const, AREA];
     expect(phraseText(allWearPhrase(all, 'seat'), MM)).toMatch(
-      /^W1 front edge: worn through; W2 300\smm × 120\smm, 100\smm from the sitter’s left end and 50\smm from the front edge: stained, tea, light$/u,
+      /^A1 front edge: worn through; A2 300\smm × 120\smm, 100\smm from the sitter’s left end and 50\smm from the front edge: stained, tea, light$/u,
     );
     expect(phraseText(allWearPhrase(all, 'back'), INCHES)).toMatch(
-      /^W1 bottom edge: .*¾″.*from the bottom edge/u,
+      /^A1 bottom edge: .*¾″.*from the bottom edge/u,
     );
   });
 

@@ -107,7 +107,7 @@ export const allWearPhrase = (wear: readonly WearArea[], kind: 'seat' | 'back'):
  *
  * @param index - of the area, from 0
  */
-export const wearMark = (index: number): string => `W${index + 1}`;
+export const wearMark = (index: number): string => `A${index + 1}`;
 
 const OTHER_PLACE: Partial<Record<WearPlace, WearPlace>> = {
   'left-end': 'right-end',

@@ -1,4 +1,11 @@
-import type { CushionDatum, CushionEdge, CushionSpec, EdgeMeets, HoldDown } from '@settlewright/geometry';
+import type {
+  CushionDatum,
+  CushionEdge,
+  CushionSpec,
+  EdgeMeets,
+  HoldDown,
+  WearArea,
+} from '@settlewright/geometry';
 import { CUSHION_EDGES, HOLD_DOWNS } from '@settlewright/geometry';
 import { ApiProperty, ApiPropertyOptional } from '@nestjs/swagger';
 import {
@@ -8,6 +15,7 @@ import {
   CushionWarningDto,
   OutlineCornerDto,
 } from './cushion-make.dto';
+import { WearAreaDto } from './wear.dto';
 
 const EDGES = [
   'wall',
@@ -166,6 +174,8 @@ export class CushionDto implements CushionSpec {
   cameraSides: CushionEdge[];
   @ApiPropertyOptional({ enum: HOLD_DOWNS })
   holdDown?: HoldDown;
+  @ApiPropertyOptional({ type: [WearAreaDto], description: 'areas that are to look used' })
+  wear?: WearArea[];
   @ApiPropertyOptional()
   notes?: string;
 }

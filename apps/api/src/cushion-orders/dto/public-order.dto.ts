@@ -1,7 +1,9 @@
 import { ApiProperty } from '@nestjs/swagger';
+import { type Paper, PAPERS } from '../../workshops/entities/workshop.entity';
 import { SIDES, type Side } from '../entities/order-message.entity';
 import { ORDER_STATES, type OrderState } from '../order-states';
 import { CushionDto } from './cushion.dto';
+import { OrderCoverDto } from './order-cover.dto';
 import { AcknowledgementDto } from './order.dto';
 import { OrderSpecDto } from './order-spec.dto';
 
@@ -51,12 +53,16 @@ export class PublicOrderDto {
   units: 'feet-inches' | 'decimal-inches' | 'millimetres';
   @ApiProperty({ enum: [16, 8] })
   roundTo: 16 | 8;
+  @ApiProperty({ enum: PAPERS, description: 'of the drawing pack, unless another is asked for' })
+  paper: Paper;
   @ApiProperty({ format: 'date-time' })
   sentAt: string;
   @ApiProperty({ type: OrderSpecDto })
   spec: OrderSpecDto;
   @ApiProperty({ type: [CushionDto] })
   cushions: CushionDto[];
+  @ApiProperty({ type: [OrderCoverDto], description: 'its cloths, without what the workshop pays for them' })
+  covers: OrderCoverDto[];
   @ApiProperty({ type: [PublicMessageDto] })
   messages: PublicMessageDto[];
   @ApiProperty({ type: AcknowledgementDto, nullable: true })

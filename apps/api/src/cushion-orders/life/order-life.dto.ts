@@ -1,6 +1,8 @@
+import type { PhrasePart } from '@settlewright/geometry';
 import { ApiProperty, ApiPropertyOptional } from '@nestjs/swagger';
 import { MAIL_STATES, type MailState } from '../../mail/entities/outbox-mail.entity';
 import { PaymentDto } from '../deposits/deposit.dto';
+import { OutlineCornerDto } from '../dto/cushion-make.dto';
 import { FileDto } from '../files/file.dto';
 import { InspectionDto } from '../inspections/inspection.dto';
 import { MARKED_STATES, type MarkedState } from '../order-states';
@@ -8,19 +10,36 @@ import { QuestionDto } from '../questions/question.dto';
 import { QuoteDto } from '../quotes/quote.dto';
 import { CHANGED_FIELDS, type ChangedField, type OrderChange } from './order-changes';
 
+/** A stretch of a phrase: words, or one quantity to show in the units of the page. */
+export class PhrasePartDto implements PhrasePart {
+  @ApiPropertyOptional()
+  text?: string;
+  @ApiPropertyOptional()
+  mm?: number;
+  @ApiPropertyOptional()
+  densityKgM3?: number;
+  @ApiPropertyOptional()
+  firmnessN?: number;
+}
+
+export class ChangedOutlineDto {
+  @ApiProperty({ type: [OutlineCornerDto] })
+  before: OutlineCornerDto[];
+  @ApiProperty({ type: [OutlineCornerDto] })
+  after: OutlineCornerDto[];
+}
+
 export class OrderChangeDto implements OrderChange {
   @ApiProperty({ type: String, nullable: true, description: 'null: the order itself' })
   mark: string | null;
   @ApiProperty({ enum: CHANGED_FIELDS, enumName: 'OrderChangedField' })
   field: ChangedField;
-  @ApiPropertyOptional({ description: 'of sizes' })
-  beforeMm?: number;
-  @ApiPropertyOptional({ description: 'of sizes' })
-  afterMm?: number;
-  @ApiPropertyOptional({ description: 'of all else' })
-  before?: string;
-  @ApiPropertyOptional({ description: 'of all else' })
-  after?: string;
+  @ApiProperty({ type: [PhrasePartDto], description: 'empty: nothing was said' })
+  before: PhrasePartDto[];
+  @ApiProperty({ type: [PhrasePartDto], description: 'empty: nothing is said' })
+  after: PhrasePartDto[];
+  @ApiPropertyOptional({ type: ChangedOutlineDto, description: 'of an outline' })
+  outlines?: ChangedOutlineDto;
 }
 
 export class OrderWordDto {

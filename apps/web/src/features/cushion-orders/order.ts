@@ -1,5 +1,5 @@
 import type { CushionRules, CushionSpec, OrderCover } from '@settlewright/geometry';
-import type { OrderState, RoundTo, UnitSystem } from '@/lib/contract.ts';
+import type { OrderState, Paper, RoundTo, UnitSystem } from '@/lib/contract.ts';
 
 /** The words of an order beside its sizes. */
 export interface OrderSpec {
@@ -123,9 +123,13 @@ export interface PublicOrder {
   neededBy: string | null;
   units: UnitSystem;
   roundTo: RoundTo;
+  /** Of the drawing pack, unless another is asked for. */
+  paper: Paper;
   sentAt: string;
   spec: OrderSpec;
   cushions: CushionSpec[];
+  /** Its cloths, without what the workshop pays for them. */
+  covers: OrderCover[];
   messages: OrderMessage[];
   acknowledgement: Acknowledgement | null;
   linkExpiresAt: string;

@@ -1,10 +1,12 @@
-import type { ReactNode } from 'react';
+import { partText, phraseText } from '@settlewright/geometry';
+import { Fragment, type ReactNode } from 'react';
 import { Measure } from '@/components/measure.tsx';
 import { Notice } from '@/components/notice.tsx';
 import type { OrderLife } from '@/lib/contract.ts';
 import { dayWords } from '@/lib/dates.ts';
 import { useFormat } from '@/lib/format.ts';
 import { SPEC_WORDS } from '../order.ts';
+import { OutlinePicture } from './outline-picture.tsx';
 
 type Change = OrderLife['changes'][number];
 
@@ -19,17 +21,40 @@ const FIELD_WORDS: Record<Change['field'], string> = {
   width: 'width',
   depth: 'depth',
   thickness: 'thickness',
+  make: 'make',
+  outline: 'outline',
+  joints: 'place in its run',
+  curve: 'curve of the back',
   'foam-grade': 'foam',
   hand: 'hand',
+  tufting: 'buttons and tufts',
   'button-count': 'buttons',
-  'button-places': 'places of the buttons, mm from the seams',
+  'button-places': 'places of the buttons, from the seams',
+  camera: 'edges the camera sees',
+  'hold-down': 'hold-down',
+  wear: 'marked wear',
+  'cushion-notes': 'notes',
 };
 
-function Side({ mm, words, field }: { mm?: number; words?: string; field: Change['field'] }): ReactNode {
-  const format = useFormat();
-  if (mm !== undefined) return <Measure text={format.length(mm)} />;
-  if (field === 'needed-by' && words) return dayWords(words);
-  return words || 'nothing';
+/** One side of a change: its words, with quantities in the units of the page, and an outline drawn. */
+function Side({ change, side }: { change: Change; side: 'before' | 'after' }): ReactNode {
+  const { style } = useFormat();
+  const parts = change[side];
+  const outline = change.outlines?.[side];
+  if (parts.length === 0) return 'nothing';
+  if (change.field === 'needed-by') return dayWords(phraseText(parts, style));
+  return (
+    <>
+      {outline && <OutlinePicture outline={outline} beside={change.outlines} />}
+      {parts.map((part, index) =>
+        part.text === undefined ? (
+          <Measure key={index} text={partText(part, style)} />
+        ) : (
+          <Fragment key={index}>{part.text}</Fragment>
+        ),
+      )}
+    </>
+  );
 }
 
 /** What reads otherwise than in what was sent before, side by side. */
@@ -71,10 +96,10 @@ export function Changes({ life, revisionLetter }: { life: OrderLife; revisionLet
                     {FIELD_WORDS[change.field]}
                   </th>
                   <td className="py-1.5 pr-3 text-ink-2">
-                    <Side mm={change.beforeMm} words={change.before} field={change.field} />
+                    <Side change={change} side="before" />
                   </td>
                   <td className="py-1.5 font-medium">
-                    <Side mm={change.afterMm} words={change.after} field={change.field} />
+                    <Side change={change} side="after" />
                   </td>
                 </tr>
               ))}

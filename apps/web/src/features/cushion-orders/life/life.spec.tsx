@@ -5,10 +5,11 @@ import { beforeEach, describe, expect, it } from 'vitest';
 import type { OrderLife } from '@/lib/contract.ts';
 import { PRODUCTION_ID, renderPage, signInAs, WORKSHOP_ID } from '@/test/render-page.tsx';
 import { server } from '@/test/server.ts';
-import { LIFE, PUBLIC_ORDER, QUOTE, SENT_ORDER } from '../test/orders.ts';
+import { CUSHIONS, LIFE, PUBLIC_ORDER, QUOTE, SENT_ORDER } from '../test/orders.ts';
 import { UpholstererPage } from '../components/upholsterer-page.tsx';
 import { ShopLife } from './shop-life.tsx';
 
+const OUTLINE = CUSHIONS[0]!.outline.map((corner) => ({ ...corner, at: [...corner.at] }));
 const LINK = '*/api/link/:token';
 const AT = '*/api/workshops/:workshopId/productions/:productionId/orders/:orderId';
 
@@ -74,8 +75,13 @@ describe("the upholsterer's page", () => {
     serve(LINK, {
       earlierRevision: 'A',
       changes: [
-        { mark: 'C1', field: 'width', beforeMm: 1016, afterMm: 1066.8 },
-        { mark: null, field: 'cover', before: 'plum moquette', after: '' },
+        { mark: 'C1', field: 'width', before: [{ mm: 1016 }], after: [{ mm: 1066.8 }] },
+        { mark: null, field: 'cover', before: [{ text: 'plum moquette' }], after: [] },
+        {
+          ...{ mark: 'C1', field: 'outline', before: [{ text: 'plain rectangle' }] },
+          after: [{ text: 'notch ' }, { mm: 50.8 }],
+          outlines: { before: OUTLINE, after: OUTLINE },
+        },
       ],
     });
     showPage();
@@ -83,6 +89,8 @@ describe("the upholsterer's page", () => {
     expect(changed.getByText('Revision B replaces revision A.')).toBeVisible();
     const rows = changed.getAllByRole('row').map((row) => row.textContent);
     expect(rows[1]).toMatch(/^C1, width.*40.*42/);
+    expect(rows[3]).toMatch(/^C1, outlineplain rectanglenotch 2″$/);
+    expect(changed.getAllByRole('row')[3]!.querySelectorAll('svg')).toHaveLength(2);
     expect(rows[2]).toBe('Coverplum moquettenothing');
   });
 
