@@ -1,6 +1,13 @@
 import { createRequire } from 'node:module';
 import { createBodyModel } from '@settlewright/anthropometry';
-import { deriveParts, measureSet, placeFrames, poseMannequin, sitterDistances } from '@settlewright/geometry';
+import {
+  deriveParts,
+  mannequinMesh,
+  measureSet,
+  placeFrames,
+  poseMannequin,
+  sitterDistances,
+} from '@settlewright/geometry';
 import { roomOfTwelve } from './lib/room-of-twelve.mjs';
 import { middleTime } from './lib/times.mjs';
 
@@ -9,7 +16,12 @@ const PARTS = 60;
 const WARM_UP = 30;
 const RUNS = 60;
 
-/** Time to find contacts, overlaps and the smallest gap of twelve sitters among the sixty parts nearest to them. */
+const SKIN_RUNS = 15;
+
+/**
+ * Time to find contacts, overlaps and the smallest gap of twelve sitters among the sixty parts nearest to them: on simple
+ * solids, and on the skins that the page measures on once the hand rests, bodies made anew each time.
+ */
 export async function run() {
   const model = createBodyModel(load('@settlewright/seed-data/populations/ansur2.json'));
   const document = roomOfTwelve();
@@ -33,5 +45,15 @@ export async function run() {
     .slice(0, PARTS);
   const measure = () => sitterDistances(bodies, parts);
   middleTime(WARM_UP, measure);
-  return [{ name: 'distances-12x60', value: middleTime(RUNS, measure), unit: 'ms', aim: 5, reference: null }];
+  const skins = bodies.map(({ pose }) => mannequinMesh(pose));
+  const measureSkins = () =>
+    sitterDistances(
+      bodies.map((body, i) => ({ ...body, mesh: { ...skins[i] } })),
+      parts,
+    );
+  const figure = (name, value, aim) => ({ name, value, unit: 'ms', aim, reference: null });
+  return [
+    figure('distances-12x60', middleTime(RUNS, measure), 5),
+    figure('distances-12x60-skin', middleTime(SKIN_RUNS, measureSkins), 100),
+  ];
 }

@@ -60,7 +60,6 @@ export * from './distance/joint-envelopes.ts';
 export { gapBetween, type Gap } from './distance/gap.ts';
 export { partShape, segmentShape } from './distance/solids.ts';
 export type { Shape } from './distance/shape.ts';
-export { skinGap } from './distance/skin-gap.ts';
 export { sitterDistances } from './distance/sitter-distances.ts';
 export * from './distance/sitter-gap.ts';
 export * from './drawing/drawing.ts';

@@ -26,17 +26,30 @@ export interface Gap {
  * limit
  */
 export function gapBetween(one: Shape, other: Shape, atMostMm = Infinity): Gap | undefined {
+  const apart = gapApart(one, other, atMostMm);
+  if (apart !== MEET) return apart;
+  const { depthMm, direction, from, to } = depthOf(one, other);
+  return -depthMm > atMostMm ? undefined : { distanceMm: -depthMm, fromMm: from, toMm: to, direction };
+}
+
+/** Solids that reach into each other; how deep was not asked. */
+export const MEET = 'meet';
+
+/**
+ * The same where it is enough to know of solids whose cores meet that they do.
+ *
+ * @param one - a solid
+ * @param other - another solid
+ * @param atMostMm - larger distances are of no matter
+ */
+export function gapApart(one: Shape, other: Shape, atMostMm: number): Gap | typeof MEET | undefined {
   // A limit below 0 asks for overlaps alone: boxes and cores that meet say nothing of how deep.
   if (boundsGap(one, other) > Math.max(0, atMostMm)) return undefined;
   const margins = one.marginMm + other.marginMm;
   const cores = coreDistance(one, other, Math.max(0, atMostMm + margins));
   if (!cores) return undefined;
   const { distanceMm, from, to } = cores;
-  if (distanceMm === 0) {
-    const { depthMm, direction, ...points } = depthOf(one, other);
-    if (-depthMm > atMostMm) return undefined;
-    return { distanceMm: -depthMm, fromMm: points.from, toMm: points.to, direction };
-  }
+  if (distanceMm === 0) return MEET;
   if (distanceMm - margins > atMostMm) return undefined;
   const direction: Vec3 = [
     (to[0] - from[0]) / distanceMm,

@@ -98,6 +98,44 @@ export function hull(corners: readonly Vec3[]): Shape {
   };
 }
 
+/** Nearly every distance of a skin is one of triangles: the same as their hull, without a loop. */
+export function triangle(a: Vec3, b: Vec3, c: Vec3): Shape {
+  const [ax, ay, az] = a;
+  const [bx, by, bz] = b;
+  const [cx, cy, cz] = c;
+  return {
+    minMm: [Math.min(ax, bx, cx), Math.min(ay, by, cy), Math.min(az, bz, cz)],
+    maxMm: [Math.max(ax, bx, cx), Math.max(ay, by, cy), Math.max(az, bz, cz)],
+    marginMm: 0,
+    support: (x, y, z, out) => {
+      const [i, j, k] = [ax * x + ay * y + az * z, bx * x + by * y + bz * z, cx * x + cy * y + cz * z];
+      const first = i >= j && i >= k;
+      const second = j >= k;
+      out[0] = first ? ax : second ? bx : cx;
+      out[1] = first ? ay : second ? by : cy;
+      out[2] = first ? az : second ? bz : cz;
+    },
+  };
+}
+
+/**
+ * A solid moved as a whole.
+ *
+ * @param shape - the solid
+ * @param by - how far, millimetres
+ */
+export const moved = (shape: Shape, by: Vec3): Shape => ({
+  minMm: add(shape.minMm, by),
+  maxMm: add(shape.maxMm, by),
+  marginMm: shape.marginMm,
+  support: (x, y, z, out) => {
+    shape.support(x, y, z, out);
+    out[0]! += by[0];
+    out[1]! += by[1];
+    out[2]! += by[2];
+  },
+});
+
 /**
  * The smallest convex solid around balls of one size: what a joint sweeps.
  *

@@ -6,7 +6,6 @@ import type { Part, Vec3 } from '../parts/part.ts';
 import { gapBetween } from './gap.ts';
 import { sitterDistances } from './sitter-distances.ts';
 import { CONTACT_MM } from './sitter-gap.ts';
-import { skinGap, skinsGap } from './skin-gap.ts';
 import { partShape, segmentShape } from './solids.ts';
 
 const ball = (name: string, at: Vec3, r: number): MannequinSegment => ({
@@ -119,7 +118,20 @@ describe('in a real set', () => {
     // Between its corners a triangle may come nearer, never further.
     expect(smallest!.distanceMm).toBeLessThanOrEqual(nearest + 0.01);
     expect(smallest!.distanceMm).toBeGreaterThan(nearest - 3);
-    expect(skinGap(withSkin[i]!.mesh, partShape(part))!.distanceMm).toBeCloseTo(smallest!.distanceMm, 3);
+  });
+
+  it('sees what lies wholly inside the flesh, where no skin meets it', () => {
+    const [one] = bodies.map((each) => ({ ...each, mesh: mannequinMesh(each.pose) }));
+    const [x, y, z] = one!.pose.joints.pelvis;
+    const inside: Part = {
+      ...board('k', [x, y + 160, z]),
+      solid: { shape: 'box', sizeMm: [30, 30, 30] },
+    };
+    const [deepest] = sitterDistances([one!], [inside])[0]!.overlaps;
+    expect(deepest).toMatchObject({ measuredOn: 'solids', thing: { partId: 'k/top-1' } });
+    expect(deepest!.distanceMm).toBeLessThan(-50);
+    const outside = { ...inside, positionMm: [x, y + 160, z + 400] as const };
+    expect(sitterDistances([one!], [outside])[0]!.overlaps).toEqual([]);
   });
 
   it('measures two neighbours from skin to skin, the same from either side', () => {
@@ -142,11 +154,8 @@ describe('in a real set', () => {
     const corners = between(0, j);
     expect(gap.distanceMm).toBeLessThanOrEqual(corners + 0.01);
     expect(gap.distanceMm).toBeGreaterThan(corners - 3);
-    const back = skinsGap(withSkin[j]!.mesh, withSkin[0]!.mesh, 1500)!;
+    const back = sitterDistances([withSkin[j]!, withSkin[0]!], [])[0]!.smallest!;
     expect(back.distanceMm).toBeCloseTo(gap.distanceMm, 2);
-    expect(skinsGap(withSkin[0]!.mesh, withSkin[j]!.mesh, gap.distanceMm - 1)).toBeUndefined();
-    const mesh = withSkin[0]!.mesh;
-    const pushed = { ...mesh, positions: mesh.positions.map((x, n) => (n % 3 === 1 ? x + 20 : x)) };
-    expect(skinsGap(mesh, pushed, 50)).toBeUndefined();
+    expect(back.thing).toMatchObject({ kind: 'body', segment: gap.segment });
   });
 });

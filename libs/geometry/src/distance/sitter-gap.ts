@@ -23,7 +23,7 @@ export interface SitterGap extends Gap {
   /** The place of the body, such as `left forearm`. */
   segment: string;
   thing: Thing;
-  /** Skin is right within 3 mm; solids, for how deep two bodies meet, within 10 at elbows and shoulders of raised arms. */
+  /** Skin is right within 3 mm; solids, where a body has no mesh, within 10 at elbows and shoulders of raised arms. */
   measuredOn: 'skin' | 'solids';
 }
 

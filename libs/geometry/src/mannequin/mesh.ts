@@ -8,6 +8,7 @@ import type { MannequinTag } from './segments.ts';
 import { fitCage, skin, skinPoints, type SkinLevel } from './skin.ts';
 import { solvedFigure } from './solve.ts';
 import { measuringStance } from './stance.ts';
+import { stretchesOfFaces } from './stretches.ts';
 import { faceTriangles, gridsOf, outwardFlips } from './triangles.ts';
 
 /** How finely a body is drawn: near for looking at and measuring on, far for a figure small in the picture. */
@@ -38,6 +39,8 @@ interface Template {
   indices: Uint32Array;
   /** The triangles in skin points. */
   triangles: Uint32Array;
+  /** The stretch of every triangle, by its place in `STRETCH_NAMES`. */
+  stretches: Uint8Array;
   tags: Uint8Array;
   groups: MannequinMesh['groups'];
   seams: Uint32Array;
@@ -74,6 +77,8 @@ function buildTemplate(detail: MannequinDetail): Template {
   const { at, size } = level(detail);
   const grids = gridsOf(at.level, cage.faces.length, size);
   const flips = outwardFlips(cage);
+  const stretchOf = stretchesOfFaces(cage);
+  const stretches: number[] = [];
   const source: number[] = [];
   const tags: number[] = [];
   const triangles: number[] = [];
@@ -85,7 +90,9 @@ function buildTemplate(detail: MannequinDetail): Template {
     const start = indices.length;
     cage.faces.forEach((face, f) => {
       if (TAG_OF_REGION[face.region] !== place) return;
-      for (const id of faceTriangles(face, grids[f]!, size, flips[f]!)) {
+      const own = faceTriangles(face, grids[f]!, size, flips[f]!);
+      for (let t = 0; t < own.length; t += 3) stretches.push(stretchOf[f]!);
+      for (const id of own) {
         let vertex = vertexOf.get(id);
         if (vertex === undefined) {
           vertex = source.length;
@@ -104,6 +111,7 @@ function buildTemplate(detail: MannequinDetail): Template {
     source: Uint32Array.from(source),
     indices: Uint32Array.from(indices),
     triangles: Uint32Array.from(triangles),
+    stretches: Uint8Array.from(stretches),
     tags: Uint8Array.from(tags),
     groups,
     seams: seamVertices(cage, grids, size, suitVertex),
@@ -140,6 +148,10 @@ function seamVertices(
 }
 
 const templates: Partial<Record<MannequinDetail, Template>> = {};
+const templateOf = (detail: MannequinDetail): Template => (templates[detail] ??= buildTemplate(detail));
+
+/** The stretch of every triangle of a near mesh, by its place in `STRETCH_NAMES`. */
+export const nearStretches = (): Uint8Array => templateOf('near').stretches;
 
 /** Unit normals of the skin points, weighted by the area of the triangles around them. */
 function skinNormals(points: Float64Array, triangles: Uint32Array): Float64Array {
@@ -187,8 +199,7 @@ export function mannequinMesh(
   detail: MannequinDetail = 'near',
 ): MannequinMesh {
   const { at } = level(detail);
-  const template = (templates[detail] ??= buildTemplate(detail));
-  const { source, indices, triangles, tags, groups, seams } = template;
+  const { source, indices, triangles, tags, groups, seams } = templateOf(detail);
   const { drawn } = solvedFigure(pose.means);
   const points = skinPoints(at, fitCage(drawn, pose.stance));
   press(points, at, drawn, pose.stance);

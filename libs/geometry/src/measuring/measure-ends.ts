@@ -1,11 +1,12 @@
-import { gapBetween, type Gap } from '../distance/gap.ts';
-import { hull, type Shape } from '../distance/shape.ts';
-import { skinGap, skinsGap } from '../distance/skin-gap.ts';
-import { partShape, segmentShape } from '../distance/solids.ts';
+import type { Gap } from '../distance/gap.ts';
+import { boundsGap, hull } from '../distance/shape.ts';
+import { skinPatches } from '../distance/skin-patches.ts';
+import { partShape } from '../distance/solids.ts';
+import { solidSurface, surfaceGap, type Surface } from '../distance/surface.ts';
 import { partEdges } from '../drawing/solid-outline.ts';
 import { mixPoints } from '../mannequin/vector.ts';
 import type { Vec3 } from '../parts/part.ts';
-import { bodyPoint, type MeasuredBody } from './body-points.ts';
+import { bodyPoint } from './body-points.ts';
 import type { MeasureEnd } from './dimension.ts';
 import type { MeasuringScene } from './measuring-scene.ts';
 
@@ -21,7 +22,11 @@ export interface MeasuredLine {
   alongMm: number;
 }
 
-type Found = { kind: 'solid'; shape: Shape; point?: Vec3 } | { kind: 'skin'; body: MeasuredBody };
+/** What lies at an end; a point where it is one. */
+interface Found {
+  surfaces: readonly Surface[];
+  point?: Vec3;
+}
 
 /**
  * Where a point end lies.
@@ -47,35 +52,30 @@ export function endPoint(end: MeasureEnd, scene: MeasuringScene): Vec3 | undefin
 function found(end: MeasureEnd, scene: MeasuringScene): Found | undefined {
   if (end.on === 'body' && end.point === 'whole') {
     const body = scene.body(end.pieceId, end.place);
-    return body && { kind: 'skin', body };
+    return body && { surfaces: skinPatches(body.mesh) };
   }
   if (end.on === 'part') {
     const part = scene.parts.get(end.partId);
-    return part && { kind: 'solid', shape: partShape(part) };
+    return part && { surfaces: [solidSurface(partShape(part))] };
   }
   const point = endPoint(end, scene);
-  return point && { kind: 'solid', shape: hull([point]), point };
+  return point && { surfaces: [solidSurface(hull([point]))], point };
 }
 
-const turned = (gap: Gap | undefined): Gap | undefined =>
-  gap && { ...gap, fromMm: gap.toMm, toMm: gap.fromMm };
-
-/** The smallest gap; of two bodies that meet the second is taken as its simple solids. */
+/** The smallest gap; of things that meet how deep the deepest stretch is. */
 function gapOf(one: Found, other: Found): Gap | undefined {
-  if (one.kind === 'solid') {
-    return other.kind === 'solid' ? gapBetween(one.shape, other.shape) : turned(gapOf(other, one));
-  }
-  if (other.kind === 'solid') return skinGap(one.body.mesh, other.shape);
+  const pairs = one.surfaces
+    .flatMap((ours) => other.surfaces.map((theirs) => ({ ours, theirs, atLeast: boundsGap(ours, theirs) })))
+    .sort((a, b) => a.atLeast - b.atLeast);
   let best: Gap | undefined;
-  for (const segment of other.body.pose.segments) {
-    const gap = skinGap(one.body.mesh, segmentShape(segment), best?.distanceMm);
+  for (const { ours, theirs, atLeast } of pairs) {
+    const limit = best ? Math.max(0, best.distanceMm) : Infinity;
+    if (atLeast > limit) break;
+    const gap = surfaceGap(ours, theirs, limit);
     if (gap && (!best || gap.distanceMm < best.distanceMm)) best = gap;
   }
-  return (best && skinsGap(one.body.mesh, other.body.mesh, best.distanceMm + SOLIDS_WITHIN_MM)) ?? best;
+  return best;
 }
-
-/** The skin may be further off than the solids by this much. */
-const SOLIDS_WITHIN_MM = 20;
 
 /**
  * Measures between two ends: points as they are, whole parts and bodies by the shortest way between them.
@@ -90,9 +90,7 @@ export function measureEnds(
 ): MeasuredLine | undefined {
   const [from, to] = [found(one, scene), found(other, scene)];
   if (!from || !to) return undefined;
-  if (from.kind === 'solid' && to.kind === 'solid' && from.point && to.point) {
-    return lineOf(from.point, to.point);
-  }
+  if (from.point && to.point) return lineOf(from.point, to.point);
   const gap = gapOf(from, to);
   return gap && { ...lineOf(gap.fromMm, gap.toMm), distanceMm: gap.distanceMm };
 }
