@@ -179,9 +179,10 @@ export function SceneStage({ picture, piece, address, actions, several, onOpenCe
                 showBodies={showBodies}
                 showDoubt={showDoubt && inDoubt.length > 0}
                 theme={theme}
-                report={({ calls, triangles }) => {
+                report={({ calls, triangles, geometries }) => {
                   sheet.current?.setAttribute('data-scene-calls', String(calls));
                   sheet.current?.setAttribute('data-scene-triangles', String(triangles));
+                  sheet.current?.setAttribute('data-scene-geometries', String(geometries));
                 }}
               />
             </Suspense>

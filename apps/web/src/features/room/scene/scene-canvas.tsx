@@ -31,7 +31,7 @@ export interface SceneProps {
   /** Raised when the theme changes. */
   theme: string;
   /** Receives the figures of the last picture, for tests and for the curious. */
-  report: (figures: { calls: number; triangles: number }) => void;
+  report: (figures: { calls: number; triangles: number; geometries: number }) => void;
   /** Who may copy the picture; the answer takes the offer back. Usually whoever saves what stands on the screen. */
   offer?: (taker: Taker) => () => void;
   /** For paper: the colours of the light theme. */
@@ -138,10 +138,11 @@ function Stage({
     aim(camera, frame, size.width / Math.max(1, size.height));
     renderer.render(scene, camera);
     const { calls, triangles } = renderer.info.render;
-    const figures = `${calls} ${triangles}`;
+    const { geometries } = renderer.info.memory;
+    const figures = `${calls} ${triangles} ${geometries}`;
     if (figures !== lastReport.current) {
       lastReport.current = figures;
-      report({ calls, triangles });
+      report({ calls, triangles, geometries });
     }
   }, 1);
 

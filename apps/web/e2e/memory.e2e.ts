@@ -1,0 +1,124 @@
+import { ARRANGEMENTS } from '@settlewright/geometry';
+import type { Browser, CDPSession, Page } from 'playwright-core';
+import { afterAll, beforeAll, describe, expect, it } from 'vitest';
+import { openOwner, signUp } from './account.ts';
+import { DESK, openBrowser, openVisitor } from './browser.ts';
+import { startProduction } from './productions.ts';
+import { choose, openRoomOf, seatAt } from './room.ts';
+
+const SET = 'Reading saloon';
+/** More than are kept to be undone, so that nothing is owed to their history. */
+const FIRST_EDITS = 220;
+const EDITS = 500;
+/** So many up, so many down: what is measured is the set as it was. */
+const WAY = 10;
+const EDITS_A_FRAME = 20;
+/** Now and then a rest, at the one or the other height, so that what waits for one is made as well. */
+const EDITS_A_REST = 50;
+const REST_MS = 300;
+/** Nothing comes any more when so many looks find the same. */
+const STILL_SAMPLES = 10;
+const SAMPLE_MS = 200;
+const MOST_GROWTH = 0.05;
+/** Small, as the machine draws without a graphics card. */
+const WINDOW = { width: 480, height: 360 };
+const TIMEOUT_MS = 300_000;
+
+/** Pulls the height of the seat up and down by the keyboard. */
+const edit = (page: Page, times: number): Promise<void> =>
+  page.evaluate(
+    async ([times, way, aFrame, aRest, restMs]) => {
+      const handle = document.querySelector<HTMLElement>('button[aria-label^="Bench B1 seat height,"]');
+      if (!handle) throw new Error('The handle is not there.');
+      handle.focus();
+      for (let n = 0; n < times; n++) {
+        const said = handle.ariaLabel;
+        const key = Math.floor(n / way) % 2 === 0 ? 'ArrowUp' : 'ArrowDown';
+        handle.dispatchEvent(new KeyboardEvent('keydown', { key, bubbles: true, cancelable: true }));
+        // The page takes in one before the next.
+        await Promise.resolve();
+        if (handle.ariaLabel === said) throw new Error(`Edit ${n} changed nothing.`);
+        if ((n + 1) % aFrame !== 0 && (n + 1) % aRest !== 0) continue;
+        const waitMs = (n + 1) % aRest === 0 ? restMs : 0;
+        await new Promise((done) => requestAnimationFrame(() => setTimeout(done, waitMs)));
+      }
+    },
+    [times, WAY, EDITS_A_FRAME, EDITS_A_REST, REST_MS] as const,
+  );
+
+const geometriesOf = async (page: Page): Promise<number> =>
+  Number(await page.locator('[data-scene]').getAttribute('data-scene-geometries'));
+
+interface Snapshot {
+  snapshot: { meta: { node_fields: string[]; node_types: [string[], ...unknown[]] } };
+  nodes: number[];
+}
+
+/** What the page's objects take, without the code that the browser makes of its scripts the longer they run. */
+async function objectBytes(client: CDPSession): Promise<number> {
+  const chunks: string[] = [];
+  const add = ({ chunk }: { chunk: string }) => void chunks.push(chunk);
+  client.on('HeapProfiler.addHeapSnapshotChunk', add);
+  await client.send('HeapProfiler.collectGarbage');
+  await client.send('HeapProfiler.takeHeapSnapshot', { reportProgress: false });
+  client.off('HeapProfiler.addHeapSnapshotChunk', add);
+  const { snapshot, nodes } = JSON.parse(chunks.join('')) as Snapshot;
+  const { node_fields: fields, node_types: types } = snapshot.meta;
+  const [type, size] = [fields.indexOf('type'), fields.indexOf('self_size')];
+  const code = types[0].indexOf('code');
+  let bytes = 0;
+  for (let at = 0; at < nodes.length; at += fields.length) {
+    if (nodes[at + type] !== code) bytes += nodes[at + size] ?? 0;
+  }
+  return bytes;
+}
+
+/** What is held once the skins of the bodies, which come from a worker, are there as well. */
+async function held(page: Page, client: CDPSession): Promise<{ geometries: number; bytes: number }> {
+  let geometries = await geometriesOf(page);
+  for (let still = 0; still < STILL_SAMPLES; still++) {
+    await page.waitForTimeout(SAMPLE_MS);
+    const now = await geometriesOf(page);
+    if (now !== geometries) still = 0;
+    geometries = now;
+  }
+  return { geometries, bytes: await objectBytes(client) };
+}
+
+describe('a long day at one set', () => {
+  let browser: Browser;
+  let page: Page;
+  let complaints: string[];
+
+  beforeAll(async () => {
+    browser = await openBrowser();
+    ({ page, complaints } = await openVisitor(browser, DESK));
+    const { email } = await signUp(page, 'reader');
+    const owner = await openOwner(email);
+    const { at, home } = await startProduction(owner, 'The Long Day');
+    const document = ARRANGEMENTS.find(({ id }) => id === 'facing-benches')?.build();
+    const set = await owner.post<{ id: string }>(`${at}/sets`, { name: SET, document });
+    await page.goto(`${home}/sets/${set.id}`);
+    await openRoomOf(page, SET);
+    await seatAt(page, 'B1', { 1: 'Woman, 5th in stature', 2: 'Man, 95th in stature' });
+    await choose(page, 'B1');
+    await page.setViewportSize(WINDOW);
+  });
+  afterAll(() => browser.close());
+
+  it(
+    `takes no more memory after ${EDITS} edits than before them`,
+    async () => {
+      const client = await page.context().newCDPSession(page);
+      await edit(page, FIRST_EDITS);
+      const before = await held(page, client);
+      await edit(page, EDITS);
+      const after = await held(page, client);
+      expect(before.geometries).toBeGreaterThan(0);
+      expect(after.geometries).toBeLessThanOrEqual(before.geometries);
+      expect(after.bytes / before.bytes - 1).toBeLessThanOrEqual(MOST_GROWTH);
+      expect(complaints).toEqual([]);
+    },
+    TIMEOUT_MS,
+  );
+});
