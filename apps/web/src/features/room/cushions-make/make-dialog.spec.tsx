@@ -101,6 +101,30 @@ describe('what is chosen of a cushion', () => {
     expect(shape?.notches).toHaveLength(1);
   });
 
+  it('marks where it is to look used, by name or by a rectangle, and hatches it', async () => {
+    const store = await open();
+    const wear = () => store.getState().document.cushions?.['b1/seat-1']?.wear;
+    await userEvent.click(screen.getByRole('button', { name: 'Marked wear' }));
+    await userEvent.click(screen.getByRole('button', { name: 'Mark an area' }));
+    expect(wear()).toEqual([{ place: 'front-edge', look: 'fade' }]);
+    await pick(/^Looks,/, 'stained');
+    await pick(/^Where,/, 'area');
+    const from = screen.getByLabelText('From that end');
+    await userEvent.clear(from);
+    await userEvent.type(from, '2');
+    await userEvent.tab();
+    await userEvent.type(screen.getByLabelText('Note (optional)'), 'tea');
+    await userEvent.tab();
+    expect(wear()).toMatchObject([
+      { place: 'area', areaMm: { fromEnd: 'left', fromSideMm: 50.8 }, look: 'stain', note: 'tea' },
+    ]);
+    const plan = screen.getByRole('img', { name: /^Plan of C1/ });
+    expect(plan).toHaveTextContent('A1');
+    expect(undoNames(store).undo).toBe('C1 marked wear A1 changed');
+    await userEvent.click(screen.getByRole('button', { name: 'Take A1 away' }));
+    expect(store.getState().document.cushions).toBeUndefined();
+  });
+
   it('changes nothing for those who only read', async () => {
     await open(false);
     expect(screen.getByRole('button', { name: /^Construction,/ })).toBeDisabled();

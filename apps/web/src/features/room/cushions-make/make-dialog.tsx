@@ -17,6 +17,7 @@ import { PlanPicture } from './plan-picture.tsx';
 import { ShapeFields } from './shape-fields.tsx';
 import { TuftingFields } from './tufting-fields.tsx';
 import { useMaking, type CushionedPiece } from './use-make.ts';
+import { WearFields } from './wear-fields.tsx';
 
 interface MakeDialogProps {
   piece: CushionedPiece;
@@ -61,7 +62,7 @@ export default function MakeDialog({ piece: opened, actions, onClose }: MakeDial
             <PlanPicture spec={spec} />
             <p className="text-sm text-ink-2">
               Finished, seam to seam. {capital(makeWords(spec.make, spec.kind))}. Thick line: closure; dashes:
-              seen by the camera.
+              seen by the camera{spec.wear ? '; hatched: to look used' : ''}.
             </p>
             {spec.faults.length > 0 && (
               <Notice tone="wont">It cannot be made so: {spec.faults.join('; ')}.</Notice>
@@ -82,6 +83,11 @@ export default function MakeDialog({ piece: opened, actions, onClose }: MakeDial
             <Disclosure words="Buttons and tufts">
               <TuftingFields {...making} />
             </Disclosure>
+            {canEdit && (
+              <Disclosure words="Marked wear">
+                <WearFields {...making} />
+              </Disclosure>
+            )}
             {canEdit && piece?.kind === 'bench' && (
               <Disclosure words="Joints of the run">
                 <JointsFields {...making} />

@@ -3,6 +3,9 @@ import {
   closurePath,
   outlinePoints,
   outlineStretches,
+  wearHatch,
+  wearMark,
+  wearRectangle,
   type CushionSpec,
   type Point2,
 } from '@settlewright/geometry';
@@ -32,6 +35,24 @@ export function PlanPicture({ spec }: { spec: CushionSpec }) {
       aria-label={`Plan of ${spec.mark}, ${format.length(finishedMm.widthMm)} by ${format.length(finishedMm.depthMm)}, ${back} edge up`}
     >
       <polygon points={points.map(page).join(' ')} {...line} fill="var(--color-sheet)" strokeWidth={1.3} />
+      {(spec.wear ?? []).map((area, i) => {
+        const { x0, y1 } = wearRectangle(spec, area);
+        return (
+          <g key={i}>
+            <path
+              d={wearHatch(spec, area, 0.5 * size)
+                .map((ends) => `M${ends.map(page).join('L')}`)
+                .join('')}
+              {...line}
+              stroke="var(--color-ink-3)"
+              strokeWidth={0.8}
+            />
+            <text x={x0 + 0.4 * size} y={-y1 + 1.1 * size} fontSize={size} fill="var(--color-ink)">
+              {wearMark(i)}
+            </text>
+          </g>
+        );
+      })}
       {lines.map(
         ({ from, to, edge }, i) =>
           cameraSides.some((side) => side === edge) && (
