@@ -5,7 +5,7 @@ import { useFormat } from '@/lib/format.ts';
 import { sayProblem } from '@/lib/problem.ts';
 import { moneyText } from '../life/money.ts';
 import { askLay } from './ask-lay.ts';
-import { clothLength } from './cloth-words.ts';
+import { clothLength, priceWords } from './cloth-words.ts';
 
 function Fact({ words, children }: { words: string; children: ReactNode }) {
   return (
@@ -55,6 +55,9 @@ export function ClothFacts({ cloth, assumed }: { cloth: ClothOfOrder; assumed: b
           {cost.wasteMinor !== undefined &&
             `, ${moneyText(cost.wasteMinor, cost.currency)} of it for what is wasted`}
         </Fact>
+      )}
+      {cover.pricePerMetreMinor !== undefined && cover.currency && (
+        <Fact words="Price">{priceWords(cover.pricePerMetreMinor, cover.currency, style)}</Fact>
       )}
       <Fact words="Roll">
         {inches(cloth.cloth.widthMm)} wide{cover.com?.measuredWidthMm === undefined ? '' : ' as measured'},{' '}

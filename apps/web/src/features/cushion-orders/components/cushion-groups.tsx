@@ -5,6 +5,9 @@ import {
   groupCushions,
   makeWords,
   outlineExtent,
+  phraseText,
+  wearMark,
+  wearPhrase,
   type CushionGroup,
   type CushionSpec,
 } from '@settlewright/geometry';
@@ -120,6 +123,17 @@ function Facts({ spec, words }: { spec: CushionSpec; words: OrderSpec }) {
         <Row name="Buttons">
           {buttons.count}, {ALIGNED_WORDS[buttons.alignedTo]}
           {words.buttons !== '' && `; ${words.buttons}`}
+        </Row>
+      )}
+      {spec.wear && (
+        <Row name="Wear">
+          <ol aria-label={`Marked wear of ${spec.mark}`}>
+            {spec.wear.map((area, i) => (
+              <li key={i}>
+                {wearMark(i)} {phraseText(wearPhrase(area, spec.kind), format.style)}
+              </li>
+            ))}
+          </ol>
         </Row>
       )}
       {words.fixing !== '' && <Row name="Fixing">{words.fixing}</Row>}

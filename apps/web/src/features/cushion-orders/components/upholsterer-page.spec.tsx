@@ -1,3 +1,4 @@
+import { plainCover } from '@settlewright/geometry';
 import { screen, waitFor, within } from '@testing-library/react';
 import userEvent from '@testing-library/user-event';
 import { http, HttpResponse } from 'msw';
@@ -41,6 +42,38 @@ describe('the order behind a private link', () => {
     expect(group).toHaveTextContent(/kg\/m³, firmness \d+\sN/);
     expect(group).toHaveTextContent(/\d+\smm \(\d+\.\d\sm\) for 2 seams/);
     expect(group).not.toHaveTextContent(/lb|¼″/);
+  });
+
+  it('is read in the units and printed on the paper that they choose, as sent unless they do', async () => {
+    const user = userEvent.setup();
+    server.use(http.get(LINK, () => HttpResponse.json(PUBLIC_ORDER)));
+    show();
+    const paper = within(await screen.findByRole('region', { name: 'The paper' }));
+    await user.click(paper.getByRole('button', { name: /^Paper, Letter/ }));
+    await user.click(await screen.findByRole('option', { name: 'A4' }));
+    await user.click(paper.getByRole('button', { name: /^Units, As sent/ }));
+    await user.click(await screen.findByRole('option', { name: 'Millimetres' }));
+    expect(paper.getByRole('link', { name: 'Drawing pack, PDF' })).toHaveAttribute(
+      'href',
+      '/api/link/secret-token/spec.pdf?paper=a4&units=millimetres&roundTo=8',
+    );
+    expect(screen.getAllByRole('region', { name: /^Cushions / })[0]).toHaveTextContent(/kg\/m³/);
+    await user.click(paper.getByRole('button', { name: /^Units, Millimetres/ }));
+    await user.click(await screen.findByRole('option', { name: /^As sent/ }));
+    expect(screen.getAllByRole('region', { name: /^Cushions / })[0]).toHaveTextContent(/lb\/ft³/);
+  });
+
+  it('says its cloths and where a cushion is to look used', async () => {
+    const [first, ...others] = PUBLIC_ORDER.cushions;
+    const wear = [{ place: 'front-edge' as const, look: 'worn-through' as const }];
+    const covers = [{ ...plainCover('plum moquette'), direction: 'railroad' as const }];
+    const order = { ...PUBLIC_ORDER, covers, cushions: [{ ...first!, wear }, ...others] };
+    server.use(http.get(LINK, () => HttpResponse.json(order)));
+    show();
+    const cloths = await screen.findByRole('region', { name: 'Cloths' });
+    expect(cloths).toHaveTextContent(/plum moquette: 54″ wide, railroaded, .*of every cushion/);
+    const marked = screen.getByRole('list', { name: `Marked wear of ${first!.mark}` });
+    expect(marked).toHaveTextContent('A1 front edge: worn through');
   });
 
   it('is agreed to with a typed name, for exactly what was sent', async () => {

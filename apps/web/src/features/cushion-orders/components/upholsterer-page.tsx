@@ -19,6 +19,7 @@ import { Questions } from '../life/questions.tsx';
 import type { PublicOrder } from '../order.ts';
 import { Acknowledge } from './acknowledge.tsx';
 import { ClosedLink } from './closed-link.tsx';
+import { ClothWords } from './cloth-words.tsx';
 import { CushionGroups } from './cushion-groups.tsx';
 import { LinkPapers } from './order-papers.tsx';
 import { Thread } from './thread.tsx';
@@ -65,6 +66,7 @@ function Opened({ token, order }: { token: string; order: PublicOrder }) {
         </dl>
         {life.data && <Changes life={life.data} revisionLetter={order.revisionLetter} />}
         <CushionGroups cushions={order.cushions} words={order.spec} toleranceMm={life.data?.toleranceMm} />
+        <ClothWords covers={order.covers} />
         {order.spec.notes !== '' && <p className="mb-3 max-w-text whitespace-pre-line">{order.spec.notes}</p>}
         {order.spec.flammability !== '' && (
           <p className="max-w-text text-sm text-ink-2">
@@ -73,7 +75,7 @@ function Opened({ token, order }: { token: string; order: PublicOrder }) {
         )}
       </div>
       <aside className="min-w-0">
-        <LinkPapers token={token} />
+        <LinkPapers token={token} order={order} />
         <RuleHeading>So far</RuleHeading>
         <Thread messages={order.messages} own="upholsterer" />
         <WriteBox

@@ -8,8 +8,12 @@ import { Measure } from '@/components/measure.tsx';
 import { entryOf, type QuantityEntry } from '@/components/quantity-entry.ts';
 import { TextArea, TextField } from '@/components/text-field.tsx';
 import { useFormat } from '@/lib/format.ts';
-import { Problem, sayProblem } from '@/lib/problem.ts';
 import { type Desk, type Inspection, type OrderFile, useLifeStep } from './desk.ts';
+import { InspectPhotos } from './inspect-photos.tsx';
+import { refusalOf } from './refusal.ts';
+
+/** Fields of the form as the server names them. */
+const FIELDS = /^(note|photoIds|cushions\.\d+\.(widthMm|depthMm|thicknessMm|note))$/;
 
 const SIZES = ['widthMm', 'depthMm', 'thicknessMm'] as const;
 type Size = (typeof SIZES)[number];
@@ -48,9 +52,8 @@ export function InspectDialog({ desk, kind, cushions, files, onClose }: InspectD
     setRows({ ...rows, [of]: { ...(rows[of] ?? BLANK), ...more } });
   const thing = kind === 'first-article' ? 'first article' : 'delivery';
   const unread = shown.some((one) => SIZES.some((size) => rows[one.mark]?.sizes[size].problem !== undefined));
-  const refusal = step.error;
-  const noteFault =
-    refusal instanceof Problem ? refusal.fields.find(({ path }) => path === 'note')?.message : undefined;
+  const refused = refusalOf(step.error, (path) => FIELDS.test(path));
+  const faultOf = (index: number, field: string) => refused.at[`cushions.${index}.${field}`];
   return (
     <FormDialog
       open
@@ -60,7 +63,7 @@ export function InspectDialog({ desk, kind, cushions, files, onClose }: InspectD
       describe="Measure seam to seam. The sheet goes to the upholsterer by mail and stands on the page."
       verb={outcome === 'accepted' ? `Accept the ${thing}` : `Reject the ${thing}`}
       busy={step.isPending}
-      problem={refusal && noteFault === undefined ? sayProblem(refusal) : null}
+      problem={refused.whole}
       onSubmit={(event) => {
         event.preventDefault();
         if (unread) return;
@@ -90,7 +93,7 @@ export function InspectDialog({ desk, kind, cushions, files, onClose }: InspectD
             </select>
           </label>
         )}
-        {shown.map((one) => {
+        {shown.map((one, index) => {
           const row = rows[one.mark] ?? BLANK;
           return (
             <fieldset key={one.mark} className="ruled pt-3">
@@ -107,7 +110,7 @@ export function InspectDialog({ desk, kind, cushions, files, onClose }: InspectD
                     entry={row.sizes[size]}
                     minMm={1}
                     maxMm={10_000}
-                    error={row.sizes[size].problem}
+                    error={row.sizes[size].problem ?? faultOf(index, size)}
                     onChange={(entry) => change(one.mark, { sizes: { ...row.sizes, [size]: entry } })}
                   />
                 ))}
@@ -116,31 +119,21 @@ export function InspectDialog({ desk, kind, cushions, files, onClose }: InspectD
                   optional
                   maxLength={500}
                   value={row.note}
+                  error={faultOf(index, 'note')}
                   onChange={(event) => change(one.mark, { note: event.target.value })}
                 />
               </div>
             </fieldset>
           );
         })}
-        {photos.length > 0 && (
-          <fieldset>
-            <legend className="mb-1 text-sm font-medium">Photographs on the sheet</legend>
-            {photos.map(({ id, name, cushionMark }) => (
-              <label key={id} className="flex min-h-9 items-center gap-2 text-sm">
-                <input
-                  type="checkbox"
-                  checked={photoIds.includes(id)}
-                  onChange={(event) =>
-                    setPhotoIds(
-                      event.target.checked ? [...photoIds, id] : photoIds.filter((one) => one !== id),
-                    )
-                  }
-                />
-                {cushionMark ? `${cushionMark}, ${name}` : name}
-              </label>
-            ))}
-          </fieldset>
-        )}
+        <InspectPhotos
+          desk={desk}
+          photos={photos}
+          mark={kind === 'first-article' ? mark : null}
+          chosen={photoIds}
+          error={refused.at.photoIds}
+          onChange={setPhotoIds}
+        />
         <ChoiceGroup
           label="Outcome"
           value={outcome}
@@ -156,7 +149,7 @@ export function InspectDialog({ desk, kind, cushions, files, onClose }: InspectD
           optional
           maxLength={2000}
           description="Asked for when something is rejected, out, or was not measured."
-          error={noteFault}
+          error={refused.at.note}
           value={note}
           onChange={(event) => setNote(event.target.value)}
         />

@@ -162,6 +162,44 @@ describe("the workshop's side", () => {
     expect(body.cushions[0]).toMatchObject({ mark: first!.mark, widthMm: 1000, depthMm: null });
   });
 
+  it('takes a photograph into the sheet, and says a refusal at its field', async () => {
+    const user = userEvent.setup();
+    const sent: unknown[] = [];
+    const photo = {
+      ...{ id: 'f9', side: 'workshop', byName: 'Nell Abara', at: '2026-02-01T08:00:00Z', current: true },
+      ...{ name: 'seam.jpg', type: 'image/jpeg', bytes: 9, widthPx: 1, heightPx: 1, cushionMark: null },
+    };
+    serve(AT, {});
+    const message = 'C1 is out or was not measured: say why it is accepted';
+    server.use(
+      http.post(`${AT}/files`, () => {
+        const added = { ...LIFE, files: [photo] };
+        server.use(http.get(`${AT}/life`, () => HttpResponse.json(added)));
+        return HttpResponse.json(added);
+      }),
+      http.post(`${AT}/inspections`, async ({ request }) => {
+        sent.push(await request.json());
+        const fields = [{ path: 'note', code: 'reason-missing', message }];
+        return HttpResponse.json(
+          { code: 'invalid', title: 'Some fields', status: 400, fields },
+          { status: 400 },
+        );
+      }),
+    );
+    showShop({ ...SENT_ORDER, state: 'shipped' });
+    await user.click(await screen.findByRole('button', { name: 'Inspect the delivery' }));
+    const dialog = within(await screen.findByRole('dialog', { name: 'Inspect the delivery' }));
+    const file = new File(['x'], 'seam.png', { type: 'image/png' });
+    await user.upload(dialog.getByLabelText('Add a photograph'), file);
+    expect(await dialog.findByRole('checkbox', { name: 'seam.jpg' })).toBeChecked();
+    await user.click(dialog.getByRole('button', { name: 'Accept the delivery' }));
+    await waitFor(() =>
+      expect(dialog.getByLabelText(/^Note/)).toHaveAccessibleDescription(new RegExp(message)),
+    );
+    expect(dialog.queryByText('Some fields')).toBeNull();
+    expect(sent).toMatchObject([{ photoIds: ['f9'] }]);
+  });
+
   it('sends a letter in doubt again, and only such a one', async () => {
     const user = userEvent.setup();
     const mail = { id: 'm1', subject: 'Cushion order 1', at: '2026-02-01T08:00:00Z' };

@@ -5,9 +5,9 @@ import { RuleHeading } from '@/components/rule-heading.tsx';
 import { TextField } from '@/components/text-field.tsx';
 import { announce } from '@/lib/announce.ts';
 import type { OrderLife } from '@/lib/contract.ts';
-import { sayProblem } from '@/lib/problem.ts';
 import { useKeptText } from '../use-kept-text.ts';
 import { type Desk, useLifeStep } from './desk.ts';
+import { refusalOf } from './refusal.ts';
 
 const VERBS = {
   'first-article': 'The first article is ready',
@@ -28,6 +28,7 @@ export function MarkState({ desk, life, nameKeptAs }: MarkStateProps) {
   const [name, keepName] = useKeptText(nameKeptAs);
   const [note, setNote] = useState('');
   const [error, setError] = useState<string | undefined>();
+  const refused = refusalOf(step.error, (path) => path === 'name' || path === 'note');
   const [to] = life.upholstererMayMark;
   if (to === undefined) {
     return life.firstArticle === 'waiting' ? (
@@ -71,7 +72,7 @@ export function MarkState({ desk, life, nameKeptAs }: MarkStateProps) {
           autoComplete="name"
           maxLength={120}
           value={name}
-          error={error}
+          error={error ?? refused.at.name}
           onChange={(event) => {
             setError(undefined);
             keepName(event.target.value);
@@ -82,9 +83,10 @@ export function MarkState({ desk, life, nameKeptAs }: MarkStateProps) {
           optional
           maxLength={1000}
           value={note}
+          error={refused.at.note}
           onChange={(event) => setNote(event.target.value)}
         />
-        {step.error && <Notice tone="wont">{sayProblem(step.error)}</Notice>}
+        {refused.whole && <Notice tone="wont">{refused.whole}</Notice>}
         <div>
           <Button type="submit" look="main" busy={step.isPending} busyWords="Saying so">
             {again ? 'The first article is ready again' : VERBS[to]}

@@ -2,10 +2,14 @@ import { type FormEvent, useState } from 'react';
 import { Button } from '@/components/button.tsx';
 import { Notice } from '@/components/notice.tsx';
 import { TextArea, TextField } from '@/components/text-field.tsx';
-import { sayProblem } from '@/lib/problem.ts';
 import { type Desk, useLifeStep } from './desk.ts';
 import { moneyText } from './money.ts';
 import { BLANK_LINE, BLANK_QUOTE, type DraftLine, readQuote } from './quote-draft.ts';
+import { refusalOf } from './refusal.ts';
+
+/** Fields of the form as the server names them. */
+const FIELDS =
+  /^(lines\.\d+\.(text|quantity|unitMinor)|currency|taxMinor|taxText|validUntil|deliveryOn|note)$/;
 
 interface QuoteFormProps {
   desk: Desk;
@@ -27,7 +31,8 @@ export function QuoteForm({ desk, beside, step, verb, children, onGiven }: Quote
   const set = (change: Partial<typeof draft>) => setDraft({ ...draft, ...change });
   const setLine = (at: number, change: Partial<DraftLine>) =>
     set({ lines: draft.lines.map((line, index) => (index === at ? { ...line, ...change } : line)) });
-  const fault = (path: string) => (tried ? faults[path] : undefined);
+  const refused = refusalOf(give.error, (path) => FIELDS.test(path));
+  const fault = (path: string, server = path) => (tried ? (faults[path] ?? refused.at[server]) : undefined);
   const submit = (event: FormEvent) => {
     event.preventDefault();
     setTried(true);
@@ -67,7 +72,7 @@ export function QuoteForm({ desk, beside, step, verb, children, onGiven }: Quote
             label="Each"
             inputMode="decimal"
             value={line.price}
-            error={fault(`lines.${index}.price`)}
+            error={fault(`lines.${index}.price`, `lines.${index}.unitMinor`)}
             onChange={(event) => setLine(index, { price: event.target.value })}
           />
         </fieldset>
@@ -95,7 +100,7 @@ export function QuoteForm({ desk, beside, step, verb, children, onGiven }: Quote
           optional
           inputMode="decimal"
           value={draft.tax}
-          error={fault('tax')}
+          error={fault('tax', 'taxMinor')}
           onChange={(event) => set({ tax: event.target.value })}
         />
         <TextField
@@ -103,6 +108,7 @@ export function QuoteForm({ desk, beside, step, verb, children, onGiven }: Quote
           optional
           value={draft.taxText}
           maxLength={80}
+          error={fault('taxText')}
           onChange={(event) => set({ taxText: event.target.value })}
         />
         <TextField
@@ -117,6 +123,7 @@ export function QuoteForm({ desk, beside, step, verb, children, onGiven }: Quote
           optional
           type="date"
           value={draft.deliveryOn}
+          error={fault('deliveryOn')}
           onChange={(event) => set({ deliveryOn: event.target.value })}
         />
       </div>
@@ -125,13 +132,14 @@ export function QuoteForm({ desk, beside, step, verb, children, onGiven }: Quote
         optional
         value={draft.note}
         maxLength={2000}
+        error={fault('note')}
         onChange={(event) => set({ note: event.target.value })}
       />
       {children}
       <p aria-live="polite" className="text-lg tabular-nums">
         {quote ? `Total ${moneyText(quote.totalMinor, draft.currency.trim().toUpperCase())}` : ''}
       </p>
-      {give.error && <Notice tone="wont">{sayProblem(give.error)}</Notice>}
+      {refused.whole && <Notice tone="wont">{refused.whole}</Notice>}
       <div>
         <Button type="submit" look="main" busy={give.isPending} busyWords="Sending">
           {verb}

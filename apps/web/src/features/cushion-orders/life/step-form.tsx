@@ -3,9 +3,9 @@ import { Button } from '@/components/button.tsx';
 import { Notice } from '@/components/notice.tsx';
 import { TextArea } from '@/components/text-field.tsx';
 import { announce } from '@/lib/announce.ts';
-import { sayProblem } from '@/lib/problem.ts';
 import { useKeptText } from '../use-kept-text.ts';
 import { type Desk, useLifeStep } from './desk.ts';
+import { refusalOf } from './refusal.ts';
 
 interface StepFormProps {
   desk: Desk;
@@ -24,6 +24,7 @@ export function StepForm({ desk, keptAs, label, verb, step, body, children }: St
   const send = useLifeStep(desk);
   const [text, keep] = useKeptText(keptAs);
   const [error, setError] = useState<string | undefined>();
+  const refused = refusalOf(send.error, (path) => path === 'text' || path === 'answer');
   return (
     <form
       noValidate
@@ -51,13 +52,14 @@ export function StepForm({ desk, keptAs, label, verb, step, body, children }: St
         value={text}
         rows={2}
         maxLength={2000}
-        error={error}
+        error={error ?? Object.values(refused.at)[0]}
         onChange={(event) => {
           setError(undefined);
+          send.reset();
           keep(event.target.value);
         }}
       />
-      {send.error && <Notice tone="wont">{sayProblem(send.error)}</Notice>}
+      {refused.whole && <Notice tone="wont">{refused.whole}</Notice>}
       <div>
         <Button type="submit" size="small" busy={send.isPending} busyWords="Sending">
           {verb}
