@@ -4,7 +4,8 @@ const turn = (a: Point, b: Point, c: Point): number =>
   (b[0] - a[0]) * (c[1] - a[1]) - (b[1] - a[1]) * (c[0] - a[0]);
 
 /**
- * Cuts an outline into convex pieces: itself when it is convex, triangles otherwise (ears cut off one by one).
+ * Cuts an outline into convex pieces: itself when it is convex; otherwise ears are cut off one by one and put together
+ * again where what they make is convex.
  *
  * @param outline - corners in turning order, either way round; its sides do not cross
  * @returns the pieces as places in the outline, in turning order
@@ -37,5 +38,37 @@ export function convexPieces(outline: readonly Point[]): number[][] {
     rest.splice(ear, 1);
   }
   if (rest.length === 3) pieces.push(rest);
-  return pieces;
+  return joined(pieces, (a, b, c) => left(a, b, c) >= -1e-9);
+}
+
+/** Both pieces in one, where they share a side; turning the same way. */
+function across(one: readonly number[], other: readonly number[]): number[] | undefined {
+  const size = other.length;
+  for (const [i, a] of one.entries()) {
+    const b = one[(i + 1) % one.length]!;
+    const at = other.indexOf(b);
+    if (at === -1 || other[(at + 1) % size] !== a) continue;
+    const rest = Array.from({ length: size - 2 }, (_, n) => other[(at + 2 + n) % size]!);
+    return [...one.slice(0, i + 1), ...rest, ...one.slice(i + 1)];
+  }
+  return undefined;
+}
+
+/** Puts pieces together as long as what they make turns one way only. */
+function joined(pieces: number[][], turnsOn: (a: number, b: number, c: number) => boolean): number[][] {
+  const done: number[][] = [];
+  const open = [...pieces];
+  for (let piece = open.pop(); piece; piece = open.pop()) {
+    let grown = piece;
+    for (let i = 0; i < open.length; i += 1) {
+      const both = across(grown, open[i]!);
+      const n = both?.length ?? 0;
+      if (!both?.every((b, k) => turnsOn(both[(k + n - 1) % n]!, b, both[(k + 1) % n]!))) continue;
+      grown = both;
+      open.splice(i, 1);
+      i = -1;
+    }
+    done.push(grown);
+  }
+  return done;
 }

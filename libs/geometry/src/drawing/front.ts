@@ -1,4 +1,4 @@
-import type { PartRole } from '../parts/part.ts';
+import type { Part, PartRole, Vec3 } from '../parts/part.ts';
 import { deriveParts } from '../pieces/kinds.ts';
 import type { SetDocument } from '../room/document.ts';
 import { drawingOf, type Drawing, type DrawShape, type PagePoint, type Pen } from './drawing.ts';
@@ -10,6 +10,16 @@ const PEN_OF_ROLE: Partial<Record<PartRole, Pen>> = {
   'back-board': 'hair',
   glass: 'hair',
 };
+
+const onWall = ([x, y]: Vec3): PagePoint => [x, -y];
+
+/** What a part fills on the page; of a shaped cushion that looks at the eye its panel, notches left open. */
+function outlineOf({ solid }: Part, corners: readonly Vec3[]): PagePoint[] {
+  const half = corners.length / 2;
+  const [rear, face] = [corners[0]!, corners[half]!];
+  const looksHere = solid.shape === 'prism' && solid.isPanel && face[2] - rear[2] > solid.depthMm / 2;
+  return looksHere ? corners.slice(half).map(onWall) : convexOutline(corners.map(onWall));
+}
 
 /**
  * The set seen square from the front, as the viewer's side of the room sees it.
@@ -23,7 +33,7 @@ export function frontOf(document: SetDocument, marginMm = 0): Drawing {
   const seen = deriveParts(document).map((part) => {
     const { corners } = partEdges(part);
     const nearest = corners.reduce((z, corner) => Math.max(z, corner[2]), -Infinity);
-    return { part, nearest, outline: convexOutline(corners.map(([x, y]): PagePoint => [x, -y])) };
+    return { part, nearest, outline: outlineOf(part, corners) };
   });
   const shapes = seen
     .sort((a, b) => a.nearest - b.nearest)

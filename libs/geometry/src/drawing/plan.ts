@@ -1,4 +1,6 @@
 import { cushionRuns, cushionRunsOf } from '../cushions/cushion-runs.ts';
+import { cushionPanel } from '../cushions/cushion-panel.ts';
+import type { CushionShape } from '../cushions/cushion-shape.ts';
 import { toRoom } from '../parts/placement.ts';
 import { benchLayout } from '../pieces/bench-layout.ts';
 import { placeFramesOf } from '../pieces/place-frames.ts';
@@ -7,6 +9,12 @@ import type { Piece, PieceOf, SetDocument } from '../room/document.ts';
 import { footprint } from '../room/footprint.ts';
 import { drawingOf, type Drawing, type DrawShape, type Fill, type PagePoint, type Pen } from './drawing.ts';
 import type { SitterColour } from './sitter-colours.ts';
+
+/** Marks of cushions and what was chosen of them, by key. */
+interface Cushions {
+  marks: ReadonlyMap<string, string>;
+  choices: NonNullable<SetDocument['cushions']>;
+}
 
 /** What a plan shows besides the pieces. */
 export interface PlanOptions {
@@ -54,17 +62,37 @@ const area = (piece: Piece, points: PagePoint[], pen: Pen, fill: Fill, dashed?: 
   ...(dashed ? { dashed } : {}),
 });
 
-function benchShapes(bench: PieceOf<'bench'>, marks: Map<string, string>): DrawShape[] {
+/** A seat cushion as it lies between two ends and two depths of its piece, in its shape. */
+function seatPanel(
+  piece: Piece,
+  [x0, x1, z0, z1]: readonly [number, number, number, number],
+  shape: CushionShape | undefined,
+): PagePoint[] {
+  const panel = cushionPanel({ widthMm: x1 - x0, depthMm: z1 - z0 }, shape);
+  if (!panel) return rectangle(piece, x0, x1, z0, z1);
+  return panel.map(([x, y]): PagePoint => {
+    const [rx, , rz] = toRoom(piece.at, [(x0 + x1) / 2 + x, 0, (z0 + z1) / 2 - y]);
+    return [rx, rz];
+  });
+}
+
+function benchShapes(bench: PieceOf<'bench'>, { marks, choices }: Cushions): DrawShape[] {
   const layout = benchLayout(bench);
   const half = bench.lengthMm / 2;
   const front = Math.max(layout.frontZMm, layout.deckFrontZMm);
   const shapes = [area(bench, rectangle(bench, -half, half, 0, front), 'edge', 'oak')];
   for (const run of cushionRuns(bench)) {
-    const [z0, z1] =
-      run.kind === 'seat' ? [layout.faceZMm, layout.frontZMm] : [bench.backThicknessMm, layout.faceZMm];
     const mark = marks.get(run.key);
+    const points =
+      run.kind === 'seat'
+        ? seatPanel(
+            bench,
+            [run.leftMm, run.rightMm, layout.faceZMm, layout.frontZMm],
+            choices[run.key]?.shape,
+          )
+        : rectangle(bench, run.leftMm, run.rightMm, bench.backThicknessMm, layout.faceZMm);
     shapes.push({
-      ...area(bench, rectangle(bench, run.leftMm, run.rightMm, z0, z1), 'fine', 'cloth'),
+      ...area(bench, points, 'fine', 'cloth'),
       ...(mark ? { cushionMark: mark } : {}),
     });
   }
@@ -113,10 +141,10 @@ function tableShapes(table: PieceOf<'table'>): DrawShape[] {
   ];
 }
 
-function pieceShapes(piece: Piece, marks: Map<string, string>): DrawShape[] {
+function pieceShapes(piece: Piece, cushions: Cushions): DrawShape[] {
   switch (piece.kind) {
     case 'bench':
-      return benchShapes(piece, marks);
+      return benchShapes(piece, cushions);
     case 'sill':
       return sillShapes(piece);
     case 'bulkhead':
@@ -129,9 +157,9 @@ function pieceShapes(piece: Piece, marks: Map<string, string>): DrawShape[] {
       const half = piece.widthMm / 2;
       const shapes = [area(piece, corners(piece), 'edge', 'oak')];
       if (piece.seatCushion.thicknessMm > 0) {
-        shapes.push(
-          area(piece, rectangle(piece, -half + 15, half - 15, 15, piece.seatDepthMm - 10), 'fine', 'cloth'),
-        );
+        const inside = [-half + 15, half - 15, 15, piece.seatDepthMm - 10] as const;
+        const shape = cushionRuns(piece).map(({ key }) => cushions.choices[key]?.shape)[0];
+        shapes.push(area(piece, seatPanel(piece, inside, shape), 'fine', 'cloth'));
       }
       if (piece.backHeightMm > 0) {
         shapes.push(area(piece, rectangle(piece, -half, half, -LOOSE_BACK_MM, 0), 'edge', 'oak'));
@@ -143,9 +171,15 @@ function pieceShapes(piece: Piece, marks: Map<string, string>): DrawShape[] {
 
 const corners = (piece: Piece): PagePoint[] => footprint(piece).corners.map(([x, z]): PagePoint => [x, z]);
 
+/** Centre of an area; its corners alone would say a rounded corner many times over. */
 function middle(points: readonly PagePoint[]): PagePoint {
-  const sum = points.reduce(([x, y], [px, py]): PagePoint => [x + px, y + py], [0, 0]);
-  return [sum[0] / points.length, sum[1] / points.length];
+  let [x, y, twice] = [0, 0, 0];
+  points.forEach(([ax, ay], i) => {
+    const [bx, by] = points[(i + 1) % points.length]!;
+    const part = ax * by - bx * ay;
+    [x, y, twice] = [x + (ax + bx) * part, y + (ay + by) * part, twice + part];
+  });
+  return [x / (3 * twice), y / (3 * twice)];
 }
 
 /**
@@ -160,8 +194,9 @@ export function planOf(document: SetDocument, options: PlanOptions = {}): Drawin
   const cushionMarks = new Map(
     cushionRunsOf(document).map((run, i): [string, string] => [run.key, `C${i + 1}`]),
   );
+  const cushions = { marks: cushionMarks, choices: document.cushions ?? {} };
   const ordered = PAINTING_ORDER.flatMap((kind) => document.pieces.filter((piece) => piece.kind === kind));
-  const shapes = ordered.flatMap((piece) => pieceShapes(piece, cushionMarks));
+  const shapes = ordered.flatMap((piece) => pieceShapes(piece, cushions));
   for (const frame of placeFramesOf(document)) {
     const sitter = options.sitters?.find(({ placeId }) => placeId === frame.placeId);
     if (!sitter) continue;

@@ -8,7 +8,8 @@ import { placeFrames } from '../pieces/place-frames.ts';
 import type { Piece, PieceOf, SetDocument } from '../room/document.ts';
 import { radians } from '../units/angle.ts';
 import { drawingOf, type DimensionShape, type Drawing, type DrawShape, type PagePoint } from './drawing.ts';
-import { convexOutline, cutOutline, partEdges, type CutPlane } from './solid-outline.ts';
+import { cutOutlines, type CutPlane } from './cut-outlines.ts';
+import { convexOutline, partEdges } from './solid-outline.ts';
 
 /** How far before and behind the bench a section reaches. */
 const AHEAD_MM = 1400;
@@ -106,10 +107,11 @@ export function sectionOf(document: SetDocument, pieceId: string, marginMm = 0):
   const plane = planeThrough(piece, piece.kind === 'bench' ? cutX(piece, document) : 0);
   const parts = deriveParts(document);
   const front = piece.kind === 'bench' ? benchLayout(piece).frontZMm : 400;
-  const cut = parts.flatMap((part) => {
-    const outline = cutOutline(part, plane);
-    return outline && touches(outline, -BEHIND_MM, front + AHEAD_MM) ? [{ part, outline }] : [];
-  });
+  const cut = parts.flatMap((part) =>
+    cutOutlines(part, plane)
+      .filter((outline) => touches(outline, -BEHIND_MM, front + AHEAD_MM))
+      .map((outline) => ({ part, outline })),
+  );
   const cutIds = new Set(cut.map(({ part }) => part.id));
   const seen = parts.filter((part) => part.pieceId === pieceId && !cutIds.has(part.id));
   const shapes: DrawShape[] = [

@@ -64,33 +64,3 @@ export function convexOutline(points: readonly PagePoint[]): PagePoint[] {
   };
   return [...half(sorted), ...half([...sorted].reverse())];
 }
-
-/** A vertical cutting plane: a point on it and the level direction the page's x axis runs along. */
-export interface CutPlane {
-  originMm: Vec3;
-  /** Unit vector in the plane, level. */
-  alongX: number;
-  alongZ: number;
-}
-
-/** The outline a part shows where a vertical plane cuts it, x along the plane and y down; `undefined` when it is missed. */
-export function cutOutline(part: Part, plane: CutPlane): PagePoint[] | undefined {
-  const { corners, edges } = partEdges(part);
-  const [ox, , oz] = plane.originMm;
-  const side = corners.map(([x, , z]) => (x - ox) * plane.alongZ - (z - oz) * plane.alongX);
-  const page = ([x, y, z]: Vec3): PagePoint => [(x - ox) * plane.alongX + (z - oz) * plane.alongZ, -y];
-  const points: PagePoint[] = [];
-  const crossed = edges.filter(([a, b]) => side[a]! > 0 !== side[b]! > 0);
-  for (const [a, b] of crossed) {
-    const [sa, sb] = [side[a]!, side[b]!];
-    const t = sa / (sa - sb);
-    const [p, q] = [corners[a]!, corners[b]!];
-    points.push(page([p[0] + (q[0] - p[0]) * t, p[1] + (q[1] - p[1]) * t, p[2] + (q[2] - p[2]) * t]));
-  }
-  // Cut straight across, a prism shows its own outline, which may be hollow; the edges along it come in its order.
-  const half = corners.length / 2;
-  const across =
-    part.solid.shape === 'prism' && crossed.length === half && crossed.every(([a, b]) => b === a + half);
-  const outline = across ? points : convexOutline(points);
-  return outline.length >= 3 ? outline : undefined;
-}

@@ -44,7 +44,8 @@ const ROUND_SIDES = 64;
 /** Middles of the sides of a 64-sided figure lie as far inside its circle as its corners lie outside: 0.06 % each. */
 const ROUND_FACTOR = 2 / (1 + Math.cos(Math.PI / ROUND_SIDES));
 
-function ringOf(part: Part): { base: Vec3[]; axis: Vec3 } {
+/** The near end of a part in the room, and the way it is drawn out. */
+export function ringOf(part: Part): { base: Vec3[]; axis: Vec3 } {
   if (part.solid.shape === 'cylinder') {
     const [x, y, z] = part.positionMm;
     const { radiusMm, heightMm } = part.solid;
@@ -75,7 +76,10 @@ function convexSolid(ring: readonly Vec3[], axis: Vec3): ConvexSolid {
     (sum, p) => add(sum, [p[0] / all.length, p[1] / all.length, p[2] / all.length]),
     [0, 0, 0],
   );
-  const [p, q, r] = ring as [Vec3, Vec3, Vec3];
+  const [p, q] = ring as [Vec3, Vec3];
+  // Pieces of a hollow outline may have corners on a straight side: the one furthest off it tells the plane best.
+  const off = (corner: Vec3): number => length(cross(sub(q, p), sub(corner, p)));
+  const r = ring.reduce((best, corner) => (off(corner) > off(best) ? corner : best));
   const found = [
     sideOf(p, q, r, inside),
     sideOf(add(p, axis), add(q, axis), add(r, axis), inside),

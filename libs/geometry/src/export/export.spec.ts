@@ -1,8 +1,10 @@
 import DxfParser, { type ICircleEntity, type ILineEntity, type ITextEntity } from 'dxf-parser';
 import { SaxesParser, type SaxesTagPlain } from 'saxes';
 import { describe, expect, it } from 'vitest';
+import { benchAlone, cushionsOf, shaped } from '../../test/shaped.ts';
 import { setDrawing } from '../drawing/set-drawing.ts';
 import type { SetView } from '../drawing/set-view.ts';
+import type { Part } from '../parts/part.ts';
 import { ARRANGEMENTS } from '../room/arrangements.ts';
 import type { PieceOf, SetDocument } from '../room/document.ts';
 import { dxfOf } from './dxf.ts';
@@ -75,6 +77,29 @@ describe('DXF, read back by a general-purpose reader', () => {
     expect(circles).toHaveLength(1);
     expect(circles[0]!.radius).toBeCloseTo(table.base.kind === 'columns' ? table.base.diameterMm / 2 : 0, 6);
     expect(circles[0]!.center).toMatchObject({ x: table.at.xMm, y: -table.at.zMm });
+  });
+
+  it('holds a notched and rounded seat with sides as long as those of its part', () => {
+    const shape = {
+      notches: [{ edge: 'back' as const, fromMm: 0, widthMm: 300, depthMm: 200 }],
+      cornerRadiusMm: { backLeft: 0, backRight: 0, frontLeft: 0, frontRight: 90 },
+    };
+    const set = shaped(benchAlone(), 'seat', shape);
+    const [{ solid }] = cushionsOf(set, 'seat') as [Part];
+    const outline = solid.shape === 'prism' ? solid.outlineMm : [];
+    const sides = outline.map(([x, y], i) => {
+      const [bx, by] = outline[(i + 1) % outline.length]!;
+      return Math.hypot(bx - x, by - y);
+    });
+    const drawn = read(dxfOf(setDrawing(set, plan, style), 'millimetres'))
+      .entities.filter((entity): entity is ILineEntity => entity.type === 'LINE')
+      .map(({ vertices: [a, b] }) => Math.hypot(a!.x - b!.x, a!.y - b!.y));
+    // Sides along the bench's own border are drawn with it; those of the notch and the chords stand alone.
+    const alone = sides.filter((length) => length < 100 || [200, 300].includes(length));
+    expect(alone.length).toBeGreaterThan(8);
+    for (const side of alone) {
+      expect(drawn.some((length) => Math.abs(length - side) < 1e-3)).toBe(true);
+    }
   });
 
   it('is ASCII, with fractions that every font has', () => {

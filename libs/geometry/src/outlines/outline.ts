@@ -215,13 +215,18 @@ export function offsetFault(
  *
  * @param corners - anticlockwise, without fault
  * @param sagMm - greatest distance of a chord from its arc, > 0
+ * @param turnRad - greatest angle between two chords of an arc, > 0; any when absent
  * @returns points anticlockwise, the first not repeated
  */
-export function outlinePoints(corners: readonly OutlineCorner[], sagMm: number): Point2[] {
+export function outlinePoints(
+  corners: readonly OutlineCorner[],
+  sagMm: number,
+  turnRad = Infinity,
+): Point2[] {
   return outlineStretches(corners).flatMap((stretch): Point2[] => {
     if (stretch.kind === 'line') return [stretch.from];
     const { from, centre, radiusMm, sweepRad } = stretch;
-    const step = 2 * Math.acos(Math.max(0, 1 - Math.min(sagMm, radiusMm) / radiusMm));
+    const step = Math.min(turnRad, 2 * Math.acos(Math.max(0, 1 - Math.min(sagMm, radiusMm) / radiusMm)));
     const chords = Math.max(1, Math.ceil(Math.abs(sweepRad) / step));
     const start = Math.atan2(from[1] - centre[1], from[0] - centre[0]);
     return Array.from({ length: chords }, (_, n): Point2 => {

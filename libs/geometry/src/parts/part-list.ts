@@ -14,6 +14,16 @@ interface BoxInPiece {
   grain?: 'x' | 'y' | 'z';
 }
 
+/** A shaped cushion before it is placed. */
+interface PanelInPiece {
+  /** Counter-clockwise as its face is seen, x along the piece. */
+  outlineMm: readonly (readonly [number, number])[];
+  thicknessMm: number;
+  centreMm: Vec3;
+  /** About the piece's x axis; a quarter turn back lays it face up. */
+  pitchRad: number;
+}
+
 /** Collects the parts of one piece and places them in the room. */
 export interface PartList {
   parts: Part[];
@@ -31,6 +41,8 @@ export interface PartList {
     material: MaterialKey,
     panel: { xMm: number; thicknessMm: number; outlineMm: readonly (readonly [number, number])[] },
   ): void;
+  /** Adds the panel of a cushion: an outline about its centre that looks along its own z axis. */
+  panel(role: PartRole, material: MaterialKey, panel: PanelInPiece): void;
 }
 
 const THINNEST_MM = 0.5;
@@ -82,6 +94,11 @@ export function partList(piece: Piece): PartList {
     crossPanel(role, material, { xMm, thicknessMm, outlineMm }) {
       const solid: Solid = { shape: 'prism', outlineMm, depthMm: thicknessMm };
       add(role, material, solid, [xMm, 0, 0], [0, turnRad - Math.PI / 2, 0], 'y');
+    },
+    panel(role, material, { outlineMm, thicknessMm, centreMm, pitchRad }) {
+      if (thicknessMm < THINNEST_MM) return;
+      const solid: Solid = { shape: 'prism', outlineMm, depthMm: thicknessMm, isPanel: true };
+      add(role, material, solid, centreMm, [pitchRad, turnRad, 0]);
     },
   };
 }

@@ -36,13 +36,19 @@ export type MaterialKey = 'oak' | 'walnut' | 'cloth' | 'wall' | 'glass' | 'ply';
 /**
  * A solid in its own frame, centred on the origin.
  * `box` is width x height x depth along x, y, z. `cylinder` stands along y.
- * `prism` is a counter-clockwise outline in x-y, extruded along z, centred in z only; where it is hollow (the face of a
- * curved back), tests for room take its convex hull.
+ * `prism` is a counter-clockwise outline in x-y, extruded along z, centred in z only; it may be hollow, as a notched
+ * seat or the face of a curved back.
  */
 export type Solid =
   | { shape: 'box'; sizeMm: Vec3 }
   | { shape: 'cylinder'; radiusMm: number; heightMm: number }
-  | { shape: 'prism'; outlineMm: readonly (readonly [number, number])[]; depthMm: number };
+  | {
+      shape: 'prism';
+      outlineMm: readonly (readonly [number, number])[];
+      depthMm: number;
+      /** The outline is the plan of a cushion, whose panel looks along z; otherwise it is a section across the part. */
+      isPanel?: true;
+    };
 
 /**
  * One board, panel or cushion of a piece, placed in the room.

@@ -3,10 +3,11 @@ import { boardRun } from '../parts/boards.ts';
 import { partList, type PartList } from '../parts/part-list.ts';
 import type { Part } from '../parts/part.ts';
 import { positionsAlong } from '../parts/spacing.ts';
-import type { PieceOf } from '../room/document.ts';
+import type { PieceOf, SetDocument } from '../room/document.ts';
 import { benchBaseParts } from './bench-base.ts';
 import { curvedPad } from './back-curve.ts';
 import { benchLayout, PANEL_MM, type BenchLayout } from './bench-layout.ts';
+import { addCushion } from './cushion-part.ts';
 
 const POST_MM = 30;
 const POST_PITCH_MM = 800;
@@ -16,14 +17,15 @@ const ARM_RAIL_MM = 35;
  * Parts of a bench: base, deck, boards of the back, cushions and ends.
  *
  * @param bench - the bench
+ * @param choices - what was chosen of the cushions of its set
  * @returns its parts, placed in the room
  */
-export function benchParts(bench: PieceOf<'bench'>): Part[] {
+export function benchParts(bench: PieceOf<'bench'>, choices: SetDocument['cushions'] = {}): Part[] {
   const list = partList(bench);
   const layout = benchLayout(bench);
   benchBaseParts(list, bench, layout);
   if (layout.hasBack) back(list, bench, layout);
-  cushions(list, bench, layout);
+  cushions(list, bench, layout, choices);
   end(list, bench, layout, 'left');
   end(list, bench, layout, 'right');
   return list.parts;
@@ -94,7 +96,12 @@ function back(list: PartList, bench: PieceOf<'bench'>, layout: BenchLayout): voi
   }
 }
 
-function cushions(list: PartList, bench: PieceOf<'bench'>, layout: BenchLayout): void {
+function cushions(
+  list: PartList,
+  bench: PieceOf<'bench'>,
+  layout: BenchLayout,
+  choices: NonNullable<SetDocument['cushions']>,
+): void {
   const { tiltRad, leanRad, faceZMm } = layout;
   const seat = bench.seatCushion.thicknessMm;
   const pad = bench.backCushion.thicknessMm;
@@ -107,8 +114,9 @@ function cushions(list: PartList, bench: PieceOf<'bench'>, layout: BenchLayout):
   const start = Math.max(0, -padRearMm / (cosLean + sinLean * Math.tan(tiltRad)));
   const rise = (layout.backTopMm - layout.seatTopRearMm) / cosLean - start;
   const middle = start + rise / 2;
-  for (const { kind, leftMm, rightMm } of cushionRuns(bench)) {
+  for (const { key, kind, leftMm, rightMm } of cushionRuns(bench)) {
     const width = rightMm - leftMm;
+    const shape = choices[key]?.shape;
     const x = (leftMm + rightMm) / 2;
     if (kind === 'back') {
       const foot: [number, number] = [
@@ -125,25 +133,27 @@ function cushions(list: PartList, bench: PieceOf<'bench'>, layout: BenchLayout):
         list.crossPanel('back-cushion', 'cloth', { xMm: x, thicknessMm: width, outlineMm });
         continue;
       }
-      list.box('back-cushion', 'cloth', {
-        sizeMm: [width, rise, pad],
+      addCushion(list, kind, {
+        sizeMm: { widthMm: width, depthMm: rise, thicknessMm: pad },
         centreMm: [
           x,
           layout.seatTopRearMm + middle * cosLean - (pad / 2) * sinLean,
           faceZMm - middle * sinLean - (pad / 2) * cosLean,
         ],
         pitchRad: -leanRad,
+        shape,
       });
       continue;
     }
-    list.box('seat-cushion', 'cloth', {
-      sizeMm: [width, seat, slope],
+    addCushion(list, kind, {
+      sizeMm: { widthMm: width, depthMm: slope, thicknessMm: seat },
       centreMm: [
         x,
         layout.seatTopFrontMm - (slope / 2) * Math.sin(tiltRad) - (seat / 2) * Math.cos(tiltRad),
         layout.frontZMm - (slope / 2) * Math.cos(tiltRad) + (seat / 2) * Math.sin(tiltRad),
       ],
       pitchRad: -tiltRad,
+      shape,
     });
   }
 }

@@ -41,7 +41,7 @@ export const BENCH: PieceDefinition<'bench'> = {
     return withPressedSeatHeight(bench, 457.2);
   },
   parameters: BENCH_PARAMETERS,
-  parts: benchParts,
+  parts: (bench, document) => benchParts(bench, document?.cushions),
   envelope,
   sentence,
 };

@@ -1,3 +1,4 @@
+import { shapesOfPiece } from '../cushions/shapes-of-piece.ts';
 import type { Part } from '../parts/part.ts';
 import type { Piece, PieceKind, SetDocument } from '../room/document.ts';
 import { BENCH } from './bench.ts';
@@ -52,32 +53,36 @@ function widened(piece: Piece): PieceDefinition<PieceKind> {
   return DEFINITIONS[piece.kind] as unknown as PieceDefinition<PieceKind>;
 }
 
-/** Parts of a piece, and the sills whose windows they were cut around. */
+/** Parts of a piece, and what of its set they were made by: the sills of a wall, the shapes of cushions. */
 interface KeptParts {
-  sills: readonly Piece[];
+  by: readonly unknown[];
   parts: readonly Part[];
 }
 
 const kept = new WeakMap<Piece, KeptParts>();
-const NO_SILLS: readonly Piece[] = [];
+const NOTHING: readonly unknown[] = [];
+
+function madeBy(piece: Piece, document: SetDocument | undefined): readonly unknown[] {
+  if (!document) return NOTHING;
+  if (piece.kind === 'bulkhead') return document.pieces.filter(({ kind }) => kind === 'sill');
+  return shapesOfPiece(document.cushions, piece.id);
+}
 
 /**
  * Boards, panels and cushions of one piece. They are derived once for a piece and kept as long as it is: a piece that
  * did not change gives the very same list again, in whatever set it stands.
  *
  * @param piece - the piece; it is not changed afterwards
- * @param document - the set; when given, boards of a bulkhead are cut around the windows of its sills
+ * @param document - the set; when given, boards of a bulkhead are cut around the windows of its sills, and cushions have
+ * the shapes that were chosen
  * @returns parts in the room frame
  */
 export function derivePieceParts(piece: Piece, document?: SetDocument): readonly Part[] {
-  const sills =
-    piece.kind === 'bulkhead' && document ? document.pieces.filter(({ kind }) => kind === 'sill') : NO_SILLS;
+  const by = madeBy(piece, document);
   const known = kept.get(piece);
-  if (known?.sills.length === sills.length && known.sills.every((sill, n) => sill === sills[n])) {
-    return known.parts;
-  }
+  if (known?.by.length === by.length && known.by.every((one, n) => one === by[n])) return known.parts;
   const parts = widened(piece).parts(piece, document);
-  kept.set(piece, { sills, parts });
+  kept.set(piece, { by, parts });
   return parts;
 }
 

@@ -1,7 +1,9 @@
+import { cushionKey } from '../cushions/cushion-key.ts';
 import { partList } from '../parts/part-list.ts';
 import type { Part } from '../parts/part.ts';
-import type { PieceOf } from '../room/document.ts';
+import type { PieceOf, SetDocument } from '../room/document.ts';
 import { radians } from '../units/angle.ts';
+import { addCushion } from './cushion-part.ts';
 import { sentenceOf, type ParameterSpec, type PieceDefinition } from './kind.ts';
 import { pressedSeatHeightMm, referenceSinkMm, withPressedSeatHeight } from './seat-sink.ts';
 import { FIRM_SEAT } from './starting-sizes.ts';
@@ -133,7 +135,7 @@ export const LOOSE_SEAT: PieceDefinition<'loose-seat'> = {
   }),
 };
 
-function parts(seat: LooseSeat): Part[] {
+function parts(seat: LooseSeat, document?: SetDocument): Part[] {
   const list = partList(seat);
   const { widthMm, seatDepthMm, deckHeightMm, seatCushion } = seat;
   const board = Math.min(SEAT_BOARD_MM, deckHeightMm / 2);
@@ -146,9 +148,12 @@ function parts(seat: LooseSeat): Part[] {
     centreMm: [0, deckHeightMm - board / 2, seatDepthMm / 2],
     grain: 'z',
   });
-  list.box('seat-cushion', 'cloth', {
-    sizeMm: [widthMm - 2 * side, seatCushion.thicknessMm, seatDepthMm],
-    centreMm: [0, deckHeightMm + seatCushion.thicknessMm / 2, seatDepthMm / 2],
+  const { thicknessMm } = seatCushion;
+  addCushion(list, 'seat', {
+    sizeMm: { widthMm: widthMm - 2 * side, depthMm: seatDepthMm, thicknessMm },
+    centreMm: [0, deckHeightMm + thicknessMm / 2, seatDepthMm / 2],
+    pitchRad: 0,
+    shape: document?.cushions?.[cushionKey({ pieceId: seat.id, kind: 'seat', number: 1 })]?.shape,
   });
   for (const [sx, z] of [
     [-1, LEG_MM / 2],

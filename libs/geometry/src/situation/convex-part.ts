@@ -1,4 +1,4 @@
-import { partEdges } from '../drawing/solid-outline.ts';
+import { partPieces, type PartPiece } from '../drawing/part-pieces.ts';
 import type { Part, Vec3 } from '../parts/part.ts';
 
 interface Directions {
@@ -6,7 +6,7 @@ interface Directions {
   normals: readonly Vec3[];
 }
 
-/** A part as a convex solid in the room, with the directions that may part it from another. */
+/** A part, or a piece of a hollow one, as a convex solid in the room, with the directions that may part it from another. */
 export interface ConvexPart {
   corners: readonly Vec3[];
   /** Unit vectors along its edges and square to its faces, none twice; worked out when first asked for. */
@@ -40,11 +40,14 @@ function unlike(vectors: readonly Vec3[]): Vec3[] {
 /**
  * Prepares a part for being tested against others.
  *
- * @param part - a placed part; a prism is taken as its convex hull, a cylinder is taken with 24 sides
- * @returns the solid in the room, millimetres
+ * @param part - a placed part; a hollow prism is taken in convex pieces, a cylinder with 24 sides
+ * @returns solids in the room, millimetres
  */
-export function convexPart(part: Part): ConvexPart {
-  const { corners, edges } = partEdges(part);
+export function convexParts(part: Part): ConvexPart[] {
+  return partPieces(part).map(convexPiece);
+}
+
+function convexPiece({ corners, edges }: PartPiece): ConvexPart {
   const axis = (n: 0 | 1 | 2) => corners.map((corner) => corner[n]);
   let known: Directions | undefined;
   return {

@@ -1,3 +1,5 @@
+import { partPieces } from '../drawing/part-pieces.ts';
+import { convexOutline } from '../drawing/solid-outline.ts';
 import type { Part } from '../parts/part.ts';
 
 /** A point seen from above: two level axes, millimetres. */
@@ -20,12 +22,30 @@ export interface PlanSolid {
 const CIRCLE_SIDES = 32;
 
 /**
- * The upright prism around a part.
+ * A part as clearances see it: the upright prism around it, or those around the pieces of a shaped cushion.
  *
  * @param part - a placed part, turned about y and x only
- * @returns its outline in the room's x and z, and its height range
+ * @returns outlines in the room's x and z, and height ranges
  */
-export function planSolid(part: Part): PlanSolid {
+export function planSolids(part: Part): PlanSolid[] {
+  const { solid, pieceId, role } = part;
+  if (solid.shape !== 'prism' || !solid.isPanel) return [planSolid(part)];
+  return partPieces(part).map(({ corners }) => {
+    const outline = convexOutline(corners.map(([x, , z]): PlanPoint => [x, z]));
+    const heights = corners.map(([, y]) => y);
+    const [[x0, x1], [z0, z1]] = [extent(outline, 0), extent(outline, 1)];
+    return {
+      pieceId,
+      role,
+      bottomMm: Math.min(...heights),
+      topMm: Math.max(...heights),
+      outline,
+      circle: [(x0 + x1) / 2, (z0 + z1) / 2, Math.hypot(x1 - x0, z1 - z0) / 2],
+    };
+  });
+}
+
+function planSolid(part: Part): PlanSolid {
   const [px, py, pz] = part.positionMm;
   const [pitch, yaw] = part.rotationRad;
   const [c, s] = [Math.cos(yaw), Math.sin(yaw)];

@@ -4,7 +4,7 @@ import { parametersOf, setParameter } from '../pieces/parameters.ts';
 import { standsInWall, windowLeavesWall } from '../pieces/wall-window.ts';
 import type { Piece, SetDocument } from '../room/document.ts';
 import type { Result } from '../units/result.ts';
-import { boxesMeet, convexPart, reachIntoEachOther, type ConvexPart } from './convex-part.ts';
+import { boxesMeet, convexParts, reachIntoEachOther, type ConvexPart } from './convex-part.ts';
 
 /** How far a number goes before the piece comes upon another. */
 export interface RoomLimit {
@@ -144,7 +144,7 @@ function obstaclesTo(
     return (changed.ok && changed.value.pieces.find((one) => one.id === piece.id)) || piece;
   };
   // A wall is taken with the openings it has; a window and its own wall are compared as such.
-  const solid = (one: Piece) => derivePieceParts(one, document).map(convexPart);
+  const solid = (one: Piece) => derivePieceParts(one, document).flatMap(convexParts);
   const swept = around(
     [parameter.min, Number(parameter.value), parameter.max].flatMap((v) => solid(pieceAt(v))),
   );

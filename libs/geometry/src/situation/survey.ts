@@ -3,7 +3,14 @@ import { benchLayout } from '../pieces/bench-layout.ts';
 import { derivePieceParts } from '../pieces/kinds.ts';
 import { placeFrames, type PlaceFrame } from '../pieces/place-frames.ts';
 import type { Piece, PieceOf, SetDocument } from '../room/document.ts';
-import { inFrame, planSolid, rectangleIn, type PlanFrame, type PlanOutline, type PlanSolid } from './plan.ts';
+import {
+  inFrame,
+  planSolids,
+  rectangleIn,
+  type PlanFrame,
+  type PlanOutline,
+  type PlanSolid,
+} from './plan.ts';
 
 /** A piece with its parts as clearances see them. */
 interface SurveyedPiece {
@@ -51,7 +58,7 @@ function surveyedPiece(piece: Piece, document: SetDocument): SurveyedPiece {
   const parts = derivePieceParts(piece, document);
   const known = surveyedPieces.get(parts);
   if (known) return known;
-  const solids = parts.map(planSolid);
+  const solids = parts.flatMap(planSolids);
   const found = { piece, solids, circle: circleAround(solids, piece) };
   surveyedPieces.set(parts, found);
   return found;

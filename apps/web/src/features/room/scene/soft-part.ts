@@ -80,5 +80,5 @@ export function softPart(part: Part): SoftPart | undefined {
   if (part.role !== 'seat-cushion' && part.role !== 'back-cushion') return undefined;
   const { solid } = part;
   if (solid.shape === 'box') return boxed(part, solid.sizeMm);
-  return solid.shape === 'prism' && part.role === 'back-cushion' ? curved(part, solid) : undefined;
+  return solid.shape === 'prism' && !solid.isPanel ? curved(part, solid) : undefined;
 }
