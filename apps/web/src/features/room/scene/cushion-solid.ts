@@ -121,8 +121,9 @@ export function addCushion(out: SolidSink, soft: SoftPart, material: number, pri
   const place = (u: number, w: number, v: number): Vec3 =>
     add(centre, add(add(scale(across, u), scale(outward, w)), scale(down, v)));
 
+  const columns = lines(a, round, stepAcross);
   const panel: Sheet = lines(b, round, stepDown).map((v) =>
-    lines(a, round, stepAcross).map((u) => {
+    columns.map((u) => {
       const [eu, ev] = [
         Math.max(0, Math.abs(u) - a + round) / round,
         Math.max(0, Math.abs(v) - b + round) / round,

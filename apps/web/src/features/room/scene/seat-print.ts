@@ -1,7 +1,7 @@
 import type { MannequinPose, Vec3 } from '@settlewright/geometry';
 import { backPrintsOf, type BackPrint } from './back-print.ts';
 import type { SeatedBody } from '../picture.ts';
-import { add, dot, mix, partAxes, scale, subtract } from './vectors.ts';
+import { add, partAxes, scale, subtract } from './vectors.ts';
 
 /** A stretch of the body that rests on a seat: a line in the room and its radius at both ends, mm. */
 interface Stretch {
@@ -67,23 +67,27 @@ export function printsByPiece(
 
 const ease = (t: number): number => t * t * (3 - 2 * t);
 
-function depthUnder(print: SeatPrint, point: Vec3): number {
-  const above = dot(print.up, subtract(point, print.origin));
+/** Asked at each point of a panel in each frame of a pull: numbers alone, as lists cost several times as much. */
+function depthUnder({ origin, up, stretches }: SeatPrint, point: Vec3): number {
+  const [ux, uy, uz] = up;
+  const above = ux * (point[0] - origin[0]) + uy * (point[1] - origin[1]) + uz * (point[2] - origin[2]);
   if (above <= 0) return 0;
   let deepest = 0;
-  for (const { from, to, radii } of print.stretches) {
-    const run = subtract(to, from);
-    const flatRun = subtract(run, scale(print.up, dot(run, print.up)));
-    const gap = subtract(point, from);
-    const length = dot(flatRun, flatRun);
-    const t = length > 0 ? Math.min(1, Math.max(0, dot(gap, flatRun) / length)) : 0;
-    const nearest = mix(from, to, t);
+  for (const { from, to, radii } of stretches) {
+    const [rx, ry, rz] = [to[0] - from[0], to[1] - from[1], to[2] - from[2]];
+    const rise = rx * ux + ry * uy + rz * uz;
+    const [fx, fy, fz] = [rx - rise * ux, ry - rise * uy, rz - rise * uz];
+    const [gx, gy, gz] = [point[0] - from[0], point[1] - from[1], point[2] - from[2]];
+    const length = fx * fx + fy * fy + fz * fz;
+    const t = length > 0 ? Math.min(1, Math.max(0, (gx * fx + gy * fy + gz * fz) / length)) : 0;
     const radius = radii[0] + (radii[1] - radii[0]) * t;
-    const away = subtract(point, nearest);
-    const outside = Math.sqrt(Math.max(0, dot(away, away) - dot(away, print.up) ** 2)) - radius;
+    const [ax, ay, az] = [gx - rx * t, gy - ry * t, gz - rz * t];
+    const over = ax * ux + ay * uy + az * uz;
+    const outside = Math.sqrt(Math.max(0, ax * ax + ay * ay + az * az - over * over)) - radius;
+    if (outside >= OUTSIDE_MM) continue;
     const share = 1 - Math.min(1, Math.max(0, (outside + INSIDE_MM) / (INSIDE_MM + OUTSIDE_MM)));
     // A knee that is lifted leaves the cloth where it is.
-    const underside = Math.max(0, dot(print.up, subtract(nearest, print.origin)) - radius);
+    const underside = Math.max(0, above - over - radius);
     deepest = Math.max(deepest, Math.max(0, above - underside) * ease(share));
   }
   return deepest;

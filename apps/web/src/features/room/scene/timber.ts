@@ -1,5 +1,5 @@
 import type { MaterialKey, Part, Vec3 } from '@settlewright/geometry';
-import { dot, partAxes, subtract } from './vectors.ts';
+import { dot, partAxes } from './vectors.ts';
 
 /** Materials that show a grain; walls are painted. */
 const TIMBERS: ReadonlySet<MaterialKey> = new Set(['oak', 'walnut', 'ply']);
@@ -31,11 +31,12 @@ export function grainsOf(part: Part, positions: ArrayLike<number>): number[] {
   const axes = partAxes(part.rotationRad);
   const order = ORDERS[part.grain];
   const seed = seedOf(part.id);
+  const [x, y, z] = part.positionMm;
+  const [along, across, over] = [axes[order[0]], axes[order[1]], axes[order[2]]];
   const grains: number[] = [];
   for (let n = 0; n < positions.length; n += 3) {
-    const at: Vec3 = [positions[n] ?? 0, positions[n + 1] ?? 0, positions[n + 2] ?? 0];
-    const from = subtract(at, part.positionMm);
-    grains.push(...order.map((axis) => dot(axes[axis], from)), seed);
+    const from: Vec3 = [positions[n]! - x, positions[n + 1]! - y, positions[n + 2]! - z];
+    grains.push(dot(along, from), dot(across, from), dot(over, from), seed);
   }
   return grains;
 }
