@@ -1,5 +1,6 @@
 import fc from 'fast-check';
 import { describe, expect, it } from 'vitest';
+import { cushionDrawing } from '../drawing/cushion-drawing.ts';
 import { ARRANGEMENTS } from '../room/arrangements.ts';
 import { chooseCushion } from '../room/cushion-choices.ts';
 import type { SetDocument } from '../room/document.ts';
@@ -110,5 +111,25 @@ describe('a set with marked cushions', () => {
     const both = chooseCushion(one, keyOf(pair.mirroredMarks[0]), { wear: [mirroredWear(AREA)] });
     expect(groupOf(both).mirroredMarks).toContain(pair.mirroredMarks[0]);
     expect(mirroredWear({ place: 'left-end', look: 'patch' }).place).toBe('right-end');
+  });
+
+  it('is drawn with its areas hatched and numbered, and no edge is named across a notch', () => {
+    const change = {
+      wear: [AREA],
+      shape: { notches: [{ edge: 'back' as const, fromMm: 500, widthMm: 200, depthMm: 60 }] },
+    };
+    const shapesOf = (document: SetDocument) =>
+      cushionDrawing(deriveCushions(document).find(({ key }) => key === 'b1/seat-1')!).plan.shapes;
+    const plain = shapesOf(start);
+    const drawn = shapesOf(chooseCushion(start, 'b1/seat-1', change));
+    const hairs = (shapes: typeof drawn) =>
+      shapes.filter((one) => one.kind === 'polyline' && one.pen === 'hair');
+    expect(hairs(drawn).length).toBeGreaterThan(hairs(plain).length + 5);
+    expect(drawn.some((one) => one.kind === 'text' && one.text === 'A1')).toBe(true);
+    const back = drawn.find((one) => one.kind === 'text' && one.text.startsWith('back edge'));
+    const { finishedMm } = deriveCushions(start).find(({ key }) => key === 'b1/seat-1')!;
+    const notch = [finishedMm.widthMm - 700, finishedMm.widthMm - 500];
+    const x = back?.kind === 'text' ? back.at[0] : NaN;
+    expect(x < notch[0]! || x > notch[1]!).toBe(true);
   });
 });

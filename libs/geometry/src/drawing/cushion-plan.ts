@@ -4,7 +4,13 @@ import { buttonSpots } from '../cushions/cushion-warnings.ts';
 import { closurePath } from '../cushions/making/edge-strip.ts';
 import { wearHatch, wearRectangle } from '../cushions/wear-hatch.ts';
 import { wearMark } from '../cushions/wear.ts';
-import { offsetFault, offsetOutline, outlinePoints, type OutlineCorner } from '../outlines/outline.ts';
+import {
+  offsetFault,
+  offsetOutline,
+  outlinePoints,
+  outlineStretches,
+  type OutlineCorner,
+} from '../outlines/outline.ts';
 import { WELT_MM } from './cushion-views.ts';
 import { datumChain, dimensionChain } from './dimension-chain.ts';
 import { drawingOf, type Drawing, type DrawShape, type PagePoint } from './drawing.ts';
@@ -167,11 +173,20 @@ function edgeWords(spec: CushionSpec, labelMm: number): DrawShape[] {
   const named = (edge: CushionEdge, text: string): string =>
     spec.make.closureEdge === edge && (spec.making?.closure.edgeMm ?? 0) > 0 ? `${text}, ${closed}` : text;
   return [
-    words([w / 2, inset], named('back', EDGE_WORDS[spec.edges.back])),
-    words([w / 2, d - inset], named('front', EDGE_WORDS[spec.edges.front])),
+    words([middleX(spec, 'back'), inset], named('back', EDGE_WORDS[spec.edges.back])),
+    words([middleX(spec, 'front'), d - inset], named('front', EDGE_WORDS[spec.edges.front])),
     words([inset, d / 2], named('right', `${EDGE_WORDS[spec.edges.right]}, sitter’s right`), true),
     words([w - inset, d / 2], named('left', `${EDGE_WORDS[spec.edges.left]}, sitter’s left`), true),
   ];
+}
+
+/** The middle of the longest stretch of an edge: no words stand across a notch. */
+function middleX({ outline, finishedMm }: CushionSpec, name: CushionEdge): number {
+  const spans = outlineStretches(outline).flatMap((one) =>
+    one.kind === 'line' && one.edge === name ? [[one.from[0], one.to[0]] as const] : [],
+  );
+  const [longest] = spans.sort((a, b) => Math.abs(b[1] - b[0]) - Math.abs(a[1] - a[0]));
+  return longest && spans.length > 1 ? (longest[0] + longest[1]) / 2 : finishedMm.widthMm / 2;
 }
 
 function planChains(spec: CushionSpec, labelMm: number): DrawShape[] {

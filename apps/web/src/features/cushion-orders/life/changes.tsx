@@ -74,10 +74,10 @@ export function Changes({ life, revisionLetter }: { life: OrderLife; revisionLet
       </Notice>
       {changes.length > 0 && (
         <div className="mt-3 overflow-x-auto" tabIndex={0} role="group" aria-label="Before and now">
-          <table className="w-full text-left text-sm">
+          <table className="w-full table-fixed text-left text-sm">
             <thead>
               <tr className="border-b border-ink">
-                <th scope="col" className="py-1.5 pr-3 font-semibold">
+                <th scope="col" className="w-[22%] py-1.5 pr-3 font-semibold">
                   Changed
                 </th>
                 <th scope="col" className="py-1.5 pr-3 font-semibold">
@@ -91,14 +91,14 @@ export function Changes({ life, revisionLetter }: { life: OrderLife; revisionLet
             <tbody>
               {changes.map((change, index) => (
                 <tr key={index} className="border-b border-rule align-top">
-                  <th scope="row" className="py-1.5 pr-3 font-normal">
+                  <th scope="row" className="py-1.5 pr-3 font-normal break-words">
                     {change.mark ? `${change.mark}, ` : ''}
                     {FIELD_WORDS[change.field]}
                   </th>
-                  <td className="py-1.5 pr-3 text-ink-2">
+                  <td className="py-1.5 pr-3 break-words text-ink-2">
                     <Side change={change} side="before" />
                   </td>
-                  <td className="py-1.5 font-medium">
+                  <td className="py-1.5 font-medium break-words">
                     <Side change={change} side="after" />
                   </td>
                 </tr>

@@ -52,7 +52,7 @@ export function QuoteForm({ desk, beside, step, verb, children, onGiven }: Quote
   return (
     <form noValidate onSubmit={submit} className="grid gap-4">
       {draft.lines.map((line, index) => (
-        <fieldset key={index} className="grid grid-cols-[1fr_4rem_7rem] items-start gap-2">
+        <fieldset key={index} className="grid grid-cols-[1fr_5.5rem_6rem] items-start gap-2">
           <legend className="sr-only">Line {index + 1}</legend>
           <TextField
             label="For"
