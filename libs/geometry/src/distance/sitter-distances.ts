@@ -9,7 +9,7 @@ import {
   type Thing,
 } from './sitter-gap.ts';
 import { skinPatches } from './skin-patches.ts';
-import { partShape, segmentShape } from './solids.ts';
+import { partSurface, segmentShape } from './solids.ts';
 import { solidSurface, surfaceGap, type Surface } from './surface.ts';
 
 /** Gaps wider than this are in nobody's way. */
@@ -90,7 +90,7 @@ export function sitterDistances(bodies: readonly PlacedBody[], parts: readonly P
   }));
   const furniture = parts.map((part) => {
     const { id, pieceId, role } = part;
-    const surface = solidSurface(partShape(part));
+    const surface = partSurface(part);
     const thing: Thing = { kind: 'part', partId: id, pieceId, role };
     return { pieceId, role, bounds: surface, surfaces: [{ surface, thing }], onSolids: false };
   });

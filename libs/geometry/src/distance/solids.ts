@@ -1,8 +1,10 @@
 import type { MannequinSegment } from '../mannequin/segments.ts';
 import { turnAboutX, turnAboutY } from '../mannequin/vector.ts';
 import type { Part, Vec3 } from '../parts/part.ts';
+import { partPieces } from '../drawing/part-pieces.ts';
 import { partEdges } from '../drawing/solid-outline.ts';
-import { cylinder, ellipsoid, hull, roundedCone, type Shape } from './shape.ts';
+import { boundsAround, cylinder, ellipsoid, hull, roundedCone, type Shape } from './shape.ts';
+import { solidSurface, type Surface } from './surface.ts';
 
 const ZERO: Vec3 = [0, 0, 0];
 
@@ -25,7 +27,7 @@ export function segmentShape(segment: MannequinSegment): Shape {
 }
 
 /**
- * A part, as distances see it: boxes and round bars as they are, a prism as its convex hull.
+ * The convex solid around a part: boxes and round bars as they are, a hollow prism filled up.
  *
  * @param part - placed in the room
  */
@@ -42,4 +44,21 @@ export function partShape(part: Part): Shape {
     [(top[0] - bottom[0]) / 2, (top[1] - bottom[1]) / 2, (top[2] - bottom[2]) / 2],
     part.solid.radiusMm,
   );
+}
+
+/**
+ * A part, as distances see it: itself, a hollow prism in convex pieces.
+ *
+ * @param part - placed in the room
+ */
+export function partSurface(part: Part): Surface {
+  const pieces = partPieces(part);
+  if (pieces.length === 1) return solidSurface(partShape(part));
+  const shapes = pieces.map(({ corners }) => hull(corners));
+  return {
+    ...boundsAround(shapes),
+    runs: shapes.map((shape) => ({ minMm: shape.minMm, maxMm: shape.maxMm, shapes: () => [shape] })),
+    around: () => partShape(part),
+    convex: false,
+  };
 }

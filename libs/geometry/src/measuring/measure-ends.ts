@@ -1,7 +1,7 @@
 import type { Gap } from '../distance/gap.ts';
 import { boundsGap, hull } from '../distance/shape.ts';
 import { skinPatches } from '../distance/skin-patches.ts';
-import { partShape } from '../distance/solids.ts';
+import { partSurface } from '../distance/solids.ts';
 import { solidSurface, surfaceGap, type Surface } from '../distance/surface.ts';
 import { partEdges } from '../drawing/solid-outline.ts';
 import { mixPoints } from '../mannequin/vector.ts';
@@ -56,7 +56,7 @@ function found(end: MeasureEnd, scene: MeasuringScene): Found | undefined {
   }
   if (end.on === 'part') {
     const part = scene.parts.get(end.partId);
-    return part && { surfaces: [solidSurface(partShape(part))] };
+    return part && { surfaces: [partSurface(part)] };
   }
   const point = endPoint(end, scene);
   return point && { surfaces: [solidSurface(hull([point]))], point };
