@@ -1,5 +1,5 @@
 import type { MannequinPose, Vec3 } from '@settlewright/geometry';
-import { dot, partAxes, subtract } from './vectors.ts';
+import { partAxes } from './vectors.ts';
 
 /** A rounded part of a trunk that leans on a back, room frame, mm. */
 export interface BackPrint {
@@ -27,10 +27,12 @@ export const backPrintsOf = (pose: MannequinPose): BackPrint[] =>
 
 /** How far a body reaches beyond a point, in a direction; less than 0 where it ends before it. */
 function reachBeyond({ centre, axes, radii }: BackPrint, point: Vec3, direction: Vec3): number {
-  const gap = subtract(point, centre);
+  const [gx, gy, gz] = [point[0] - centre[0], point[1] - centre[1], point[2] - centre[2]];
   let [a, b, c] = [0, 0, -1];
-  for (const n of [0, 1, 2] as const) {
-    const [along, at] = [dot(axes[n], direction) / radii[n], dot(axes[n], gap) / radii[n]];
+  for (let n = 0; n < 3; n++) {
+    const [axis, radius] = [axes[n]!, radii[n]!];
+    const along = (axis[0] * direction[0] + axis[1] * direction[1] + axis[2] * direction[2]) / radius;
+    const at = (axis[0] * gx + axis[1] * gy + axis[2] * gz) / radius;
     a += along * along;
     b += along * at;
     c += at * at;

@@ -33,20 +33,17 @@ function lines(half: number, round: number, step: number): number[] {
 
 /** Normal of each point of a sheet, from the points next to it. */
 function normalsOf(sheet: Sheet): Sheet {
-  const at = (row: number, column: number): Vec3 => {
-    const points = sheet[Math.min(Math.max(row, 0), sheet.length - 1)] ?? [];
-    return points[Math.min(Math.max(column, 0), points.length - 1)] ?? [0, 0, 0];
-  };
-  return sheet.map((points, row) =>
-    points.map((_, column) =>
-      normalise(
-        cross(
-          subtract(at(row + 1, column), at(row - 1, column)),
-          subtract(at(row, column + 1), at(row, column - 1)),
-        ),
-      ),
-    ),
-  );
+  return sheet.map((points, row) => {
+    const before = sheet[row - 1] ?? points;
+    const after = sheet[row + 1] ?? points;
+    return points.map((point, column) => {
+      const [left, right] = [points[column - 1] ?? point, points[column + 1] ?? point];
+      const [over, under] = [before[column] ?? point, after[column] ?? point];
+      const [ax, ay, az] = [under[0] - over[0], under[1] - over[1], under[2] - over[2]];
+      const [bx, by, bz] = [right[0] - left[0], right[1] - left[1], right[2] - left[2]];
+      return normalise([ay * bz - az * by, az * bx - ax * bz, ax * by - ay * bx]);
+    });
+  });
 }
 
 /** Corners of the two triangles between two lines of a sheet: how far down and across. */
@@ -118,8 +115,12 @@ export function addCushion(out: SolidSink, soft: SoftPart, material: number, pri
   const crown = Math.min(CROWN_MM, thick * 0.12);
   const [stepAcross, stepDown] = stepsOf(soft, prints);
   const press = pressOf(prints, soft);
-  const place = (u: number, w: number, v: number): Vec3 =>
-    add(centre, add(add(scale(across, u), scale(outward, w)), scale(down, v)));
+  const [cx, cy, cz] = centre;
+  const place = (u: number, w: number, v: number): Vec3 => [
+    cx + across[0] * u + outward[0] * w + down[0] * v,
+    cy + across[1] * u + outward[1] * w + down[1] * v,
+    cz + across[2] * u + outward[2] * w + down[2] * v,
+  ];
 
   const columns = lines(a, round, stepAcross);
   const panel: Sheet = lines(b, round, stepDown).map((v) =>
