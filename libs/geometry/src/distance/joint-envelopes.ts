@@ -61,7 +61,7 @@ export function jointEnvelopes(pose: MannequinPose, { sweeps }: JointRanges): Jo
   const shoulder = bendPoint(f, stance, restShoulder(f));
   // What is swept is the flesh of the elbow, round its middle.
   const upperMm = length(sub(restElbowFlesh(f), restShoulder(f)));
-  const { hip, knee } = legLine(f, stance);
+  const { hip, knee } = legLine(f, stance, 0);
   const elbowAt = (forwards: number, outwards: number): Vec3 => {
     const out: Vec3 = [Math.sin(outwards), -Math.cos(outwards), 0];
     const ahead = turnAboutX(out, ZERO, -forwards);

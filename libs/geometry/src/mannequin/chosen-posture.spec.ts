@@ -1,5 +1,8 @@
 import { describe, expect, it } from 'vitest';
+import jointFile from '@settlewright/seed-data/joint-ranges.json' with { type: 'json' };
 import { percentilePeople } from '../../test/survey-like-people.ts';
+import { jointAngles, jointWarnings } from './joint-angles.ts';
+import { readJointRanges } from './joint-ranges.ts';
 import { poseMannequin, type MannequinPose, type SeatPosture } from './pose.ts';
 import type { PostureChoice } from '../room/posture-choice.ts';
 
@@ -81,6 +84,34 @@ describe('a posture that somebody chose', () => {
     expect(pose.joints.rightWrist).not.toEqual(sit(undefined).joints.rightWrist);
     expect(pose.joints.leftWrist).toEqual(sit(undefined).joints.leftWrist);
     expect(kinds(sit({ arms: 'cup' }, { table: undefined }))).toContain('table-out-of-reach');
+  });
+
+  it('crosses the ankles: each foot beyond the other, links as long as before, nothing bent too far', () => {
+    const ranges = readJointRanges(jointFile);
+    const apart = (pose: MannequinPose, a: keyof MannequinPose['joints'], b: keyof MannequinPose['joints']) =>
+      Math.hypot(...pose.joints[a].map((x, i) => x - pose.joints[b][i]!));
+    for (const liftMm of [0, -40, 60]) {
+      const [usual, crossed] = [sit(undefined, {}, liftMm), sit({ feet: 'ankles-crossed' }, {}, liftMm)];
+      expect(kinds(crossed)).toEqual(expect.arrayContaining(['ankles-crossed', 'not-as-checked']));
+      const { leftAnkle, rightAnkle, leftKnee, rightKnee, leftToe, rightToe } = crossed.joints;
+      expect(leftAnkle[0]).toBeLessThan(-30);
+      expect(rightAnkle[0]).toBeGreaterThan(30);
+      expect(leftAnkle[2]).toBeGreaterThan(rightAnkle[2] + 60);
+      expect([leftKnee, rightKnee]).toEqual([usual.joints.leftKnee, usual.joints.rightKnee]);
+      for (const side of ['left', 'right'] as const) {
+        expect(apart(crossed, `${side}Knee`, `${side}Ankle`)).toBeCloseTo(
+          apart(usual, `${side}Knee`, `${side}Ankle`),
+          6,
+        );
+      }
+      expect(Math.min(leftToe[1], rightToe[1])).toBeGreaterThan(-1);
+      expect(jointWarnings(crossed, ranges)).toEqual([]);
+      const turned = jointAngles(crossed).filter(({ motion }) => motion === 'rotation');
+      expect(turned.map(({ side, deg }) => [side, deg > 10 && deg < 45])).toEqual([
+        ['left', true],
+        ['right', true],
+      ]);
+    }
   });
 
   it('puts hanging feet on a rail under them, and says when there is none in reach', () => {

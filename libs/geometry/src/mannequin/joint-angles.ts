@@ -1,7 +1,7 @@
 import { degrees } from '../units/angle.ts';
 import type { JointLimit, JointRanges } from './joint-ranges.ts';
 import type { MannequinPose } from './pose.ts';
-import { chestRad, direction, type ArmStance, type Stance } from './stance.ts';
+import { chestRad, direction, type ArmStance, type ShinStance, type Stance } from './stance.ts';
 import { clamp, dot, turnAboutX } from './vector.ts';
 
 type Motion = Pick<JointLimit, 'joint' | 'motion'>;
@@ -34,6 +34,23 @@ function armAngles(arm: ArmStance, stance: Stance): Omit<JointAngle, 'side'>[] {
   ];
 }
 
+function shinAngles(
+  { shinRad, footRad, inwardRad }: ShinStance,
+  { thighRad }: Stance,
+): Omit<JointAngle, 'side'>[] {
+  const ankle = degrees(footRad - shinRad);
+  return [
+    {
+      joint: 'hip',
+      motion: 'rotation',
+      deg: degrees(Math.atan2(Math.tan(inwardRad), Math.cos(shinRad - thighRad))),
+    },
+    { joint: 'knee', motion: 'flexion', deg: 90 + degrees(shinRad - thighRad) },
+    { joint: 'ankle', motion: 'plantar flexion', deg: ankle },
+    { joint: 'ankle', motion: 'dorsiflexion', deg: -ankle },
+  ];
+}
+
 /**
  * The bends of a posed body as a clinic counts them: 0 standing with hanging arms, feet square to the shins.
  *
@@ -41,13 +58,19 @@ function armAngles(arm: ArmStance, stance: Stance): Omit<JointAngle, 'side'>[] {
  * @returns degrees, below 0 the other way
  */
 export function jointAngles({ stance }: Pick<MannequinPose, 'stance'>): JointAngle[] {
-  const { thighRad, shinRad, footRad, trunkRad, slumpRad } = stance;
-  const ankle = degrees(footRad - shinRad);
+  const { thighRad, shins, trunkRad, slumpRad } = stance;
+  const [left, right] = shins.map((shin) => shinAngles(shin, stance));
   return [
     { joint: 'hip', motion: 'flexion', deg: 90 + degrees(trunkRad - slumpRad - thighRad) },
-    { joint: 'knee', motion: 'flexion', deg: 90 + degrees(shinRad - thighRad) },
-    { joint: 'ankle', motion: 'plantar flexion', deg: ankle },
-    { joint: 'ankle', motion: 'dorsiflexion', deg: -ankle },
+    ...left!.flatMap((angle, i): JointAngle[] => {
+      const other = right![i]!;
+      return angle.deg === other.deg
+        ? [angle]
+        : [
+            { ...angle, side: 'left' },
+            { ...other, side: 'right' },
+          ];
+    }),
     ...(['left', 'right'] as const).flatMap((side, i) =>
       armAngles(stance.arms[i]!, stance).map((angle) => ({ ...angle, side })),
     ),

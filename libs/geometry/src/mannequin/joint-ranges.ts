@@ -11,7 +11,7 @@ const schema = z.strictObject({
   limits: z.array(
     z.strictObject({
       joint: z.enum(['shoulder', 'elbow', 'wrist', 'hip', 'knee', 'ankle']),
-      motion: z.enum(['flexion', 'extension', 'abduction', 'plantar flexion', 'dorsiflexion']),
+      motion: z.enum(['flexion', 'extension', 'abduction', 'rotation', 'plantar flexion', 'dorsiflexion']),
       deg: z.number().positive(),
       source,
     }),

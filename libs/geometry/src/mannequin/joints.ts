@@ -33,12 +33,14 @@ export function bodyJoints(f: Figure, stance: Stance, placement: BodyPlacement):
     const pivot = turnAboutX(skullBase, neck, 0.4 * giveBack);
     return turnAboutX(turnAboutX(bendPoint(f, stance, p), neck, 0.4 * giveBack), pivot, 0.6 * giveBack);
   };
-  const leg = legLine(f, stance);
-  const foot = (p: Vec3): Vec3 =>
-    add(leg.ankle, turnAboutY(turnAboutX(p, [0, 0, 0], stance.footRad), [0, 0, 0], stance.toesOutRad));
   const out = (p: Vec3): Vec3 => toRoom(placement, p);
   const pair = (side: 'left' | 'right'): Record<Paired, Vec3> => {
-    const arm = stance.arms[side === 'left' ? 0 : 1];
+    const n = side === 'left' ? 0 : 1;
+    const arm = stance.arms[n];
+    const { footRad, toesOutRad } = stance.shins[n];
+    const leg = legLine(f, stance, n);
+    const foot = (p: Vec3): Vec3 =>
+      add(leg.ankle, turnAboutY(turnAboutX(p, [0, 0, 0], footRad), [0, 0, 0], toesOutRad));
     const flip = (p: Vec3): Vec3 => out(side === 'left' ? p : mirror(p));
     const sole = -f.MH - stance.shoeMm;
     return {

@@ -2,7 +2,18 @@ import type { Vec3 } from '../parts/part.ts';
 import { LIMB_COLUMNS, type Cage } from './cage.ts';
 import type { Figure } from './figure.ts';
 import { HIP_FORWARD_MM, HIP_HEIGHT_MM, restAnkle, restKnee, type Stance } from './stance.ts';
-import { add, along, clamp, mix, mixPoints, scale, sub, turnAboutX, turnAboutY } from './vector.ts';
+import {
+  add,
+  along,
+  clamp,
+  mix,
+  mixPoints,
+  scale,
+  sub,
+  turnAbout,
+  turnAboutX,
+  turnAboutY,
+} from './vector.ts';
 
 /**
  * Points of one limb ring: `across` and `up` are half axes, column 3 lies at `across`, column 1 at `up`.
@@ -113,16 +124,26 @@ export interface LegLine {
   ankle: Vec3;
 }
 
-/** Joints of the left leg in a stance. */
-export function legLine(f: Figure, stance: Stance): LegLine {
+const FORWARDS: Vec3 = [0, 0, 1];
+
+/** Turns a point below a left knee towards the other leg. */
+export const leanInwards = (p: Vec3, knee: Vec3, angleRad: number): Vec3 =>
+  angleRad === 0 ? p : add(knee, turnAbout(sub(p, knee), FORWARDS, -angleRad));
+
+/** Joints of one leg in a stance, as if it were the left one; `side` 0 is the left, 1 the right. */
+export function legLine(f: Figure, stance: Stance, side: 0 | 1): LegLine {
   const hipAxis: Vec3 = [0, HIP_HEIGHT_MM, HIP_FORWARD_MM];
+  const { shinRad, inwardRad } = stance.shins[side];
   const rest = restKnee(f);
   const knee = turnAboutX(rest, hipAxis, stance.thighRad);
-  const shin = turnAboutX(sub(restAnkle(f), rest), [0, 0, 0], stance.shinRad);
+  const leant = leanInwards(sub(restAnkle(f), rest), [0, 0, 0], inwardRad);
+  const shin = turnAboutX(leant, [0, 0, 0], shinRad);
   return { hip: [0.24 * f.HB, HIP_HEIGHT_MM, HIP_FORWARD_MM], knee, ankle: add(knee, shin) };
 }
 
 const FOOT_SHARE = [0.3, 0.5, 0.75, 1, 1, 1];
+/** How much of the turn of a thigh about its length its rings take, from the second to the knee. */
+const TURN_SHARE = [0, 0.4, 0.8];
 
 /**
  * Writes the section points of both legs into `points`, bent as the stance says.
@@ -137,26 +158,30 @@ export function writeLegs(f: Figure, stance: Stance, cage: Cage, points: Float64
   const hipAxis: Vec3 = [0, HIP_HEIGHT_MM, HIP_FORWARD_MM];
   const kneeRest = restKnee(f);
   const ankleRest = restAnkle(f);
-  const { knee, ankle } = legLine(f, stance);
-  const onFoot = (p: Vec3, share: number): Vec3 => {
-    const moved = add(ankle, sub(p, ankleRest));
-    const pitched = turnAboutX(moved, ankle, mix(stance.shinRad, stance.footRad, share));
-    return turnAboutY(pitched, ankle, stance.toesOutRad * share);
-  };
-  const place = (ring: number, p: Vec3): Vec3 => {
-    if (ring <= 3) return turnAboutX(p, hipAxis, stance.thighRad * (ring === 1 ? 0.8 : 1));
-    if (ring <= 6) {
-      const angle = ring === 4 ? (stance.thighRad + stance.shinRad) / 2 : stance.shinRad;
-      return turnAboutX(add(knee, sub(p, kneeRest)), knee, angle);
-    }
-    return onFoot(p, FOOT_SHARE[ring - 7] ?? 1);
-  };
-  const write = (ids: readonly [number, number], p: Vec3): void => {
-    points.set(p, ids[0] * 3);
-    points.set([-p[0], p[1], p[2]], ids[1] * 3);
-  };
-  rings.forEach((ring, r) => {
-    ring.forEach((p, c) => write([cage.legs[0][r + 1]![c]!, cage.legs[1][r + 1]![c]!], place(r + 1, p)));
-  });
-  write(cage.toes, onFoot(toe, 1));
+  for (const side of [0, 1] as const) {
+    const { shinRad, footRad, toesOutRad, inwardRad } = stance.shins[side];
+    const { knee, ankle } = legLine(f, stance, side);
+    const onFoot = (p: Vec3, share: number): Vec3 => {
+      const moved = leanInwards(add(ankle, sub(p, ankleRest)), ankle, inwardRad * (1 - share));
+      const pitched = turnAboutX(moved, ankle, mix(shinRad, footRad, share));
+      return turnAboutY(pitched, ankle, toesOutRad * share);
+    };
+    const place = (ring: number, p: Vec3): Vec3 => {
+      const inwards = inwardRad * (ring === 1 ? 0 : (TURN_SHARE[ring - 2] ?? 1));
+      if (ring <= 3) {
+        const lifted = turnAboutX(p, hipAxis, stance.thighRad * (ring === 1 ? 0.8 : 1));
+        return leanInwards(lifted, knee, inwards);
+      }
+      if (ring <= 6) {
+        const angle = ring === 4 ? (stance.thighRad + shinRad) / 2 : shinRad;
+        return turnAboutX(leanInwards(add(knee, sub(p, kneeRest)), knee, inwards), knee, angle);
+      }
+      return onFoot(p, FOOT_SHARE[ring - 7] ?? 1);
+    };
+    const write = (id: number, [x, y, z]: Vec3): void => points.set([side === 0 ? x : -x, y, z], id * 3);
+    rings.forEach((ring, r) => {
+      ring.forEach((p, c) => write(cage.legs[side][r + 1]![c]!, place(r + 1, p)));
+    });
+    write(cage.toes[side], onFoot(toe, 1));
+  }
 }

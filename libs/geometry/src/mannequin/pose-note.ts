@@ -3,6 +3,7 @@ export interface PoseNote {
   kind:
     | 'feet-hang'
     | 'feet-on-rail'
+    | 'ankles-crossed'
     | 'rail-out-of-reach'
     | 'slides-forward'
     | 'knees-lift'

@@ -15,11 +15,13 @@ const soft = (height: number): number => (height + Math.sqrt(height * height + 9
  * @param points - skin points of `at` in the body frame, changed in place
  */
 export function press(points: Float64Array, at: SkinLevel, figure: Figure, stance: Stance): void {
-  const { ankle } = legLine(figure, stance);
-  const turnFoot = (p: Vec3): Vec3 =>
-    turnAboutY(turnAboutX(p, [0, 0, 0], stance.footRad), [0, 0, 0], stance.toesOutRad);
-  const up = turnFoot([0, 1, 0]);
-  const depth = dot(turnFoot([0, -figure.MH - stance.shoeMm, 0]), up);
+  const soles = ([0, 1] as const).map((n) => {
+    const { footRad, toesOutRad } = stance.shins[n];
+    const turnFoot = (p: Vec3): Vec3 => turnAboutY(turnAboutX(p, [0, 0, 0], footRad), [0, 0, 0], toesOutRad);
+    const up = turnFoot([0, 1, 0]);
+    const depth = dot(turnFoot([0, -figure.MH - stance.shoeMm, 0]), up);
+    return { ankle: legLine(figure, stance, n).ankle, up, depth };
+  });
   for (let v = 0; v < at.level.pointCount; v++) {
     const flags = at.touch[v]!;
     if (flags === TOUCH.none) continue;
@@ -30,6 +32,7 @@ export function press(points: Float64Array, at: SkinLevel, figure: Figure, stanc
     if (flags & TOUCH.seat) points[v * 3 + 1] = soft(y);
     if (flags & TOUCH.midline && side !== 0) points[v * 3] = side * soft(side * x);
     if (flags & TOUCH.sole) {
+      const { ankle, up, depth } = soles[side === -1 ? 1 : 0]!;
       const height = dot(sub([side * x, y, z], ankle), up) - depth;
       const lift = soft(height) - height;
       points[v * 3] = x + side * up[0] * lift;

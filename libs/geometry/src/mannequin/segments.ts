@@ -1,7 +1,7 @@
 import type { Vec3 } from '../parts/part.ts';
 import { toRoom, type BodyPlacement } from './body-placement.ts';
 import type { Figure } from './figure.ts';
-import { legLine, thighRings } from './leg-sections.ts';
+import { leanInwards, legLine, thighRings } from './leg-sections.ts';
 import {
   bendPoint,
   bicepsTuck,
@@ -56,22 +56,17 @@ type Stretch = readonly [tag: MannequinTag, name: string, from: Ball, to: Ball];
 const hipAxis: Vec3 = [0, HIP_HEIGHT_MM, HIP_FORWARD_MM];
 const ZERO: Vec3 = [0, 0, 0];
 
-/** Solids of the left leg: top of the thigh, knee, calf and foot lie where the skin has them. */
-function legStretches(f: Figure, stance: Stance): Stretch[] {
-  const { knee, ankle } = legLine(f, stance);
+/** Solids of one leg as if it were the left: top of the thigh, knee, calf and foot lie where the skin has them. */
+function legStretches(f: Figure, stance: Stance, side: 0 | 1): Stretch[] {
+  const { shinRad, footRad, toesOutRad, inwardRad } = stance.shins[side];
+  const { knee, ankle } = legLine(f, stance, side);
   const kneeRest = restKnee(f);
   const [first] = thighRings(f);
   const onThigh = (p: Vec3): Vec3 => turnAboutX(p, hipAxis, stance.thighRad);
-  const onShin = (p: Vec3): Vec3 => turnAboutX(add(knee, sub(p, kneeRest)), knee, stance.shinRad);
+  const onShin = (p: Vec3): Vec3 =>
+    turnAboutX(leanInwards(add(knee, sub(p, kneeRest)), knee, inwardRad), knee, shinRad);
   const onFoot = (p: Vec3): Vec3 =>
-    add(
-      ankle,
-      turnAboutY(
-        turnAboutX([p[0], p[1], p[2] - FOOT_BACK_MM], ZERO, stance.footRad),
-        ZERO,
-        stance.toesOutRad,
-      ),
-    );
+    add(ankle, turnAboutY(turnAboutX([p[0], p[1], p[2] - FOOT_BACK_MM], ZERO, footRad), ZERO, toesOutRad));
   const cap = kneeRadius(f);
   const calf = (f.BKL - f.BPL - 7) / 2;
   const heel = 0.34 * f.FB;
@@ -79,14 +74,14 @@ function legStretches(f: Figure, stance: Stance): Stretch[] {
   const sole = -f.MH - stance.shoeMm;
   const thigh: Ball = [onThigh([first.centreX, f.TC / 2, first.z]), f.TC / 2];
   // A heel turned against the shin keeps some of its flesh with the shin.
-  const heelIn = clamp(HEEL_IN_MM * (stance.footRad - stance.shinRad), -3, 9);
+  const heelIn = clamp(HEEL_IN_MM * (footRad - shinRad), -3, 9);
   const heelBall: Ball = [onFoot([0, sole + heel, heel + heelIn - 0.255 * f.FL]), heel];
   // Toes turned out stay as long as the skin is, though the inner ball comes forward.
   const toeBall = (out: number): Ball => [
     onFoot([
       out * (f.FB / 2 - toe),
       sole + toe,
-      0.745 * f.FL - toe - (out < 0 ? (f.FB / 2 - toe) * Math.sin(stance.toesOutRad) : 0),
+      0.745 * f.FL - toe - (out < 0 ? (f.FB / 2 - toe) * Math.sin(toesOutRad) : 0),
     ]),
     toe,
   ];
@@ -146,8 +141,10 @@ export function bodySegments(f: Figure, stance: Stance, placement: BodyPlacement
       toRadiusMm: to[1],
     };
   };
-  const limbs = (['left', 'right'] as const).flatMap((side, i) =>
-    [...legStretches(f, stance), ...armStretches(f, stance.arms[i]!)].map((each) => solid(each, side)),
+  const limbs = ([0, 1] as const).flatMap((n) =>
+    [...legStretches(f, stance, n), ...armStretches(f, stance.arms[n])].map((each) =>
+      solid(each, n === 0 ? 'left' : 'right'),
+    ),
   );
   const chest = chestRad(stance);
   const blob = (

@@ -4,11 +4,17 @@ import { selfCrossings, visibleCrossings } from '../../test/self-crossings.ts';
 import { builds } from '../../test/survey-like-people.ts';
 import { mannequinMesh, measuringMesh, type MannequinMesh } from './mesh.ts';
 import { poseMannequin } from './pose.ts';
+import type { PostureChoice } from '../room/posture-choice.ts';
 
 const SHOE_MM = 25;
 /** On a bench of the person's own height, leaning back a little; a table stands 20 mm over the elbows. */
-function seated(means: Record<MeasureKey, number>, atTable: boolean): MannequinMesh {
-  const seatMm = means.popliteal_height + SHOE_MM;
+function seated(
+  means: Record<MeasureKey, number>,
+  atTable: boolean,
+  choice?: PostureChoice,
+  liftMm = 0,
+): MannequinMesh {
+  const seatMm = means.popliteal_height + SHOE_MM + liftMm;
   return mannequinMesh(
     poseMannequin({
       means,
@@ -22,6 +28,7 @@ function seated(means: Record<MeasureKey, number>, atTable: boolean): MannequinM
         ...(atTable && { table: { topMm: seatMm + means.elbow_rest_height + 20, overlapMm: 40 } }),
       },
       sinkMm: 0,
+      choice,
     }),
   );
 }
@@ -29,6 +36,13 @@ function seated(means: Record<MeasureKey, number>, atTable: boolean): MannequinM
 describe('a body does not run through itself where one can see it', () => {
   it.each(builds())('%s: measuring, hands in lap, hands on table', (_, means) => {
     for (const mesh of [measuringMesh(means), seated(means, false), seated(means, true)]) {
+      expect(visibleCrossings(mesh, selfCrossings(mesh)).map(({ at }) => at.map(Math.round))).toEqual([]);
+    }
+  });
+
+  it.each(builds())('%s: ankles crossed, on a seat of their own height, lower and higher', (_, means) => {
+    for (const liftMm of [0, -40, 60]) {
+      const mesh = seated(means, false, { arms: 'lap', feet: 'ankles-crossed' }, liftMm);
       expect(visibleCrossings(mesh, selfCrossings(mesh)).map(({ at }) => at.map(Math.round))).toEqual([]);
     }
   });

@@ -16,6 +16,15 @@ export interface ArmStance {
   handBack: Vec3;
 }
 
+/** One leg below the knee, written as if it were the sitter's left one. */
+export interface ShinStance {
+  shinRad: number;
+  footRad: number;
+  toesOutRad: number;
+  /** Shin leaning towards the other leg, as the thigh turns outwards about its own length; the foot stays level. */
+  inwardRad: number;
+}
+
 /**
  * How a body is bent, in its own frame: x to the sitter's left, y up from the pressed seat, z forward
  * from the rearmost buttock along the seat. Angles about x in radians; positive carries z downwards.
@@ -26,9 +35,7 @@ export interface Stance {
   slumpRad: number;
   headRad: number;
   thighRad: number;
-  shinRad: number;
-  footRad: number;
-  toesOutRad: number;
+  shins: readonly [left: ShinStance, right: ShinStance];
   arms: readonly [left: ArmStance, right: ArmStance];
   /** Height of the shoe under the heel. */
   shoeMm: number;
@@ -159,14 +166,13 @@ export function measuringStance(f: Figure): Stance {
   const elbow = restElbow(f);
   const wrist = along(elbow, [0, 0, 1], armLinks(f).forearmMm);
   const arm: ArmStance = { shoulder, elbow, wrist, hand: [0, 0, 1], handBack: [0, 1, 0] };
+  const shin: ShinStance = { shinRad: 0, footRad: 0, toesOutRad: 0, inwardRad: 0 };
   return {
     trunkRad: 0,
     slumpRad: 0,
     headRad: 0,
     thighRad: 0,
-    shinRad: 0,
-    footRad: 0,
-    toesOutRad: 0,
+    shins: [shin, shin],
     arms: [arm, arm],
     shoeMm: 0,
     forefootMm: 0,

@@ -166,6 +166,7 @@ describe('bends of the joints', () => {
       'wrist extension': 70,
       'hip flexion': 125,
       'knee flexion': 130,
+      'hip rotation': 45,
       'ankle plantar flexion': 50,
       'ankle dorsiflexion': 20,
     });

@@ -15,6 +15,12 @@ export const ARM_WORDS = {
   level: 'Hanging, forearms level',
 } as const;
 
+const FEET_WORDS = {
+  floor: 'Feet on the floor or hanging',
+  rail: 'Feet on the rail',
+  'ankles-crossed': 'Ankles crossed',
+} as const;
+
 /** "1½″ to the sitter’s left, 1″ back". */
 function sayNudge({ leftMm, aheadMm }: NonNullable<PostureChoice['nudge']>, style: LengthStyle): string[] {
   const size = (mm: number) => formatLength(Math.abs(mm), style);
@@ -31,7 +37,7 @@ export function sayChoice(choice: PostureChoice | undefined, style: LengthStyle)
   const said = [
     ...(trunk ? [TRUNK_WORDS[trunk]] : []),
     ...(arms ? [ARM_WORDS[arms]] : []),
-    ...(feet ? [feet === 'rail' ? 'Feet on the rail' : 'Feet on the floor or hanging'] : []),
+    ...(feet ? [FEET_WORDS[feet]] : []),
     ...(nudge ? sayNudge(nudge, style) : []),
   ];
   return said.join(', ').toLowerCase();

@@ -16,6 +16,8 @@ export function sayNote({ kind, valueMm = 0, side = 'left' }: PoseNote, style: L
       return 'hands on the lap';
     case 'feet-on-rail':
       return 'feet on the rail';
+    case 'ankles-crossed':
+      return 'ankles crossed';
     case 'rail-out-of-reach':
       return 'no rail in reach of the feet';
     case 'sits-upright':

@@ -93,13 +93,14 @@ export function PostureForm({ picture, body }: Props) {
         ]}
         onChange={(value) => ask(value, { arms: value === USUAL ? undefined : value })}
       />
-      <Select<OrUsual<'floor' | 'rail'>>
+      <Select<OrUsual<NonNullable<PostureChoice['feet']>>>
         label="Feet"
         value={choice.feet ?? USUAL}
         options={[
           { value: USUAL, words: 'As the place suggests' },
           { value: 'floor', words: feetHang ? 'Hanging' : 'On the floor, hanging where they do not reach' },
           { value: 'rail', words: 'On the rail', ...detailOf('rail') },
+          { value: 'ankles-crossed', words: 'Ankles crossed' },
         ]}
         onChange={(value) => ask(value, { feet: value === USUAL ? undefined : value })}
       />

@@ -28,7 +28,8 @@ export function SittingWords({ body }: { body: SeatedBody }) {
   const words = [
     ...(leans ? [] : ['sits against the back']),
     ...notes.map((note) => sayNote(note, style)),
-    ...(body.pose.heelGapMm > 0.5 || notes.some(({ kind }) => kind === 'feet-on-rail')
+    ...(body.pose.heelGapMm > 0.5 ||
+    notes.some(({ kind }) => kind === 'feet-on-rail' || kind === 'ankles-crossed')
       ? []
       : ['feet on the floor']),
     'head level',
