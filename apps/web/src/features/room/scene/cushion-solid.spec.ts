@@ -1,4 +1,11 @@
-import { ARRANGEMENTS, deriveParts, type SetDocument } from '@settlewright/geometry';
+import {
+  ARRANGEMENTS,
+  chooseCushion,
+  cushionRunsOf,
+  deriveParts,
+  type CushionShape,
+  type SetDocument,
+} from '@settlewright/geometry';
 import { describe, expect, it } from 'vitest';
 import { addCushion } from './cushion-solid.ts';
 import type { SeatPrint } from './seat-print.ts';
@@ -18,6 +25,14 @@ const softOf = (document: SetDocument, kind: SoftPart['kind']) =>
   deriveParts(document)
     .flatMap((part) => softPart(part) ?? [])
     .find((soft) => soft.kind === kind)!;
+const shapedBench = (kind: SoftPart['kind'], shape: CushionShape): SetDocument =>
+  chooseCushion(bench, cushionRunsOf(bench).find((run) => run.kind === kind)!.key, { shape });
+const NOTCHED: CushionShape = {
+  notches: [{ edge: 'back', fromMm: 0, widthMm: 200, depthMm: 150 }],
+  cornerRadiusMm: { backLeft: 0, backRight: 0, frontLeft: 120, frontRight: 0 },
+};
+const notched = softOf(shapedBench('seat', NOTCHED), 'seat');
+const notchedBack = softOf(shapedBench('back', NOTCHED), 'back');
 const seat = softOf(bench, 'seat');
 const back = softOf(bench, 'back');
 const pad = softOf(curvedBench, 'back');
@@ -74,6 +89,8 @@ describe('a cushion', () => {
     ['seat', seat],
     ['back', back],
     ['curved back', pad],
+    ['notched seat', notched],
+    ['notched back', notchedBack],
   ])('stays inside its box and has its crown at the measured height: %s', (_, soft) => {
     const over = from(soft, drawn(soft)).map(([, outward]) => outward);
     expect(Math.max(...over)).toBeGreaterThan(soft.thickMm / 2 - 1.5);
@@ -88,6 +105,9 @@ describe('a cushion', () => {
       [back, [leaning(back)]],
       [pad, []],
       [pad, [leaning(pad)]],
+      [notched, []],
+      [notched, [print]],
+      [notchedBack, [leaning(notchedBack)]],
     ] as const) {
       const { positions, normals } = drawn(soft, prints);
       for (let n = 0; n < positions.length; n += 9) {
@@ -135,5 +155,40 @@ describe('a cushion', () => {
       );
     expect(Math.min(...near(pressed, seat.centre[0]))).toBeCloseTo(topMm - 30, 0);
     expect(Math.min(...near(pressed, seat.centre[0] + 350))).toBeGreaterThan(topMm - 1);
+  });
+
+  it('of a plan of its own is closed: every side of a triangle is met by another', () => {
+    for (const prints of [[], [print]]) {
+      const { positions } = drawn(notched, prints);
+      const sides = new Map<string, number>();
+      const name = (n: number) =>
+        positions
+          .slice(n, n + 3)
+          .map((value) => value.toFixed(2))
+          .join();
+      for (let n = 0; n < positions.length; n += 9) {
+        const corners = [name(n), name(n + 3), name(n + 6)];
+        if (new Set(corners).size < 3) continue;
+        corners.forEach((corner, m) => {
+          const next = corners[(m + 1) % 3]!;
+          const [side, way] = corner < next ? [`${corner} ${next}`, 1] : [`${next} ${corner}`, -1];
+          sides.set(side, (sides.get(side) ?? 0) + way);
+        });
+      }
+      expect([...sides].filter(([, met]) => met !== 0)).toEqual([]);
+    }
+  });
+
+  it('of a plan of its own goes down under a sitter, and leaves its notch free', () => {
+    const out = drawn(notched, [print]);
+    const plain = drawn(notched);
+    const under = (of: SolidArrays) =>
+      Math.min(...panelAt(notched, of, 0, 0).filter((w) => w > -notched.thickMm / 2 + 1));
+    expect(under(plain) - under(out)).toBeCloseTo(30, -0.5);
+    const taken = softOf(bench, 'seat');
+    const inNotch = from(taken, out).filter(
+      ([u, , v]) => Math.abs(u) > taken.widthMm / 2 - 199 && u > 0 && v < -taken.lengthMm / 2 + 149,
+    );
+    expect(inNotch).toEqual([]);
   });
 });

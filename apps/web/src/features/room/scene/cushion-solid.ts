@@ -1,25 +1,26 @@
 import type { Vec3 } from '@settlewright/geometry';
-import { leanedInBy } from './back-print.ts';
-import { pressedBy, type SeatPrint } from './seat-print.ts';
+import {
+  addBoxing,
+  addSheet,
+  LEAST_MM,
+  placerOf,
+  pressOf,
+  ROUNDING,
+  roundOf,
+  sagAt,
+  type Sheet,
+} from './cushion-cover.ts';
+import { addOutlinedCushion } from './outlined-cushion.ts';
+import type { SeatPrint } from './seat-print.ts';
 import type { SoftPart } from './soft-part.ts';
 import type { SolidSink } from './solid-arrays.ts';
-import { add, cross, dot, normalise, scale, subtract } from './vectors.ts';
+import { normalise, scale } from './vectors.ts';
 
-/** Edge of the cover, its crown over the panel and the width over which the crown rises, mm. */
-const ROUND_MM = 20;
-const CROWN_MM = 9;
-const CROWN_RUN_MM = 150;
 /** Distances of the lines of a panel: close where somebody sits or leans on it and down a curve, mm. */
 const PRESSED_STEP_MM = 56;
 const LEANED_STEP_MM = 100;
 const CURVED_STEP_MM = 26;
 const FREE_STEP_MM = 240;
-/** A pressed panel stays so far over the deck, mm. */
-const LEAST_MM = 8;
-const ROUNDING = [1, 0.75, 0] as const;
-
-type Sheet = Vec3[][];
-
 /** Lines across a panel of half width `half`: close at the rounded edges. */
 function lines(half: number, round: number, step: number): number[] {
   const edge = ROUNDING.map((share) => half - round * (1 - share));
@@ -46,31 +47,6 @@ function normalsOf(sheet: Sheet): Sheet {
   });
 }
 
-/** Corners of the two triangles between two lines of a sheet: how far down and across. */
-const CORNERS = [0, 0, 1, 0, 1, 1, 0, 0, 1, 1, 0, 1] as const;
-
-/** Made anew for each frame of a pull: plain loops, as lists and spreads cost ten times as much. */
-/** Its outline is drawn round the edges alone: inside them a panel is never seen against anything but itself. */
-function addSheet(out: SolidSink, sheet: Sheet, normals: Sheet, material: number) {
-  const { positions, normals: facing, materials, roundPositions, roundNormals } = out;
-  for (let row = 0; row + 1 < sheet.length; row++) {
-    const width = sheet[row]!.length;
-    for (let column = 0; column + 1 < width; column++) {
-      const border = Math.min(row, column, sheet.length - 2 - row, width - 2 - column) < ROUNDING.length;
-      for (let n = 0; n < CORNERS.length; n += 2) {
-        const [r, c] = [row + CORNERS[n]!, column + CORNERS[n + 1]!];
-        const [at, normal] = [sheet[r]![c]!, normals[r]![c]!];
-        positions.push(at[0], at[1], at[2]);
-        facing.push(normal[0], normal[1], normal[2]);
-        materials.push(material);
-        if (!border) continue;
-        roundPositions.push(at[0], at[1], at[2]);
-        roundNormals.push(normal[0], normal[1], normal[2]);
-      }
-    }
-  }
-}
-
 /** Points round the rim of a panel, closed. */
 function rimOf(panel: Sheet): Vec3[] {
   const first = panel[0] ?? [];
@@ -79,23 +55,6 @@ function rimOf(panel: Sheet): Vec3[] {
   const left = panel.slice(1, -1).map((row) => row[0]!);
   const round = [...first, ...right, ...[...last].reverse(), ...left.reverse()];
   return [...round, round[0]!];
-}
-
-function addLoop(out: SolidSink, loop: readonly Vec3[], weight: number) {
-  loop.slice(1).forEach((point, n) => {
-    out.edges.push(...loop[n]!, ...point);
-    out.edgeWeights.push(weight);
-  });
-}
-
-/** How far the panel of a cushion goes in at a point of its free face. */
-type Press = (point: Vec3) => number;
-
-function pressOf(prints: readonly SeatPrint[], { kind, outward }: SoftPart): Press {
-  if (kind === 'seat') return (point) => pressedBy(prints, point);
-  const backs = prints.flatMap((print) => print.backs);
-  const inward = scale(outward, -1);
-  return (point) => leanedInBy(backs, point, inward);
 }
 
 /** Distances of the lines across and down a panel. */
@@ -109,18 +68,16 @@ function stepsOf({ kind, hollowAt }: SoftPart, prints: readonly SeatPrint[]): [n
  * pressed in where somebody sits or leans. The seat's panel looks up, the back's forwards.
  */
 export function addCushion(out: SolidSink, soft: SoftPart, material: number, prints: readonly SeatPrint[]) {
-  const { centre, across, outward, down, thickMm: thick, hollowAt } = soft;
+  const { outward, thickMm: thick, hollowAt, outlineMm } = soft;
+  if (outlineMm) {
+    addOutlinedCushion(out, { ...soft, outlineMm }, material, prints);
+    return;
+  }
   const [a, b] = [soft.widthMm / 2, soft.lengthMm / 2];
-  const round = Math.min(ROUND_MM, thick * 0.35, a * 0.4, b * 0.4);
-  const crown = Math.min(CROWN_MM, thick * 0.12);
+  const round = roundOf(thick, a, b);
   const [stepAcross, stepDown] = stepsOf(soft, prints);
   const press = pressOf(prints, soft);
-  const [cx, cy, cz] = centre;
-  const place = (u: number, w: number, v: number): Vec3 => [
-    cx + across[0] * u + outward[0] * w + down[0] * v,
-    cy + across[1] * u + outward[1] * w + down[1] * v,
-    cz + across[2] * u + outward[2] * w + down[2] * v,
-  ];
+  const place = placerOf(soft);
 
   const columns = lines(a, round, stepAcross);
   const panel: Sheet = lines(b, round, stepDown).map((v) =>
@@ -130,8 +87,7 @@ export function addCushion(out: SolidSink, soft: SoftPart, material: number, pri
         Math.max(0, Math.abs(v) - b + round) / round,
       ];
       const [du, dv] = [eu * Math.sqrt(1 - (ev * ev) / 2), ev * Math.sqrt(1 - (eu * eu) / 2)];
-      const inward = Math.min(a - Math.abs(u), b - Math.abs(v)) / CROWN_RUN_MM;
-      const sag = crown * (1 - Math.min(1, inward)) ** 2;
+      const sag = sagAt(thick, Math.min(a - Math.abs(u), b - Math.abs(v)));
       const rise = round * Math.sqrt(Math.max(0, 1 - du * du - dv * dv));
       const at: readonly [number, number] = [
         eu > 0 ? Math.sign(u) * (a - round + round * du) : u,
@@ -143,18 +99,8 @@ export function addCushion(out: SolidSink, soft: SoftPart, material: number, pri
   );
   addSheet(out, panel, normalsOf(panel), material);
 
-  const rim = rimOf(panel);
-  const foot = rim.map((point) =>
-    add(point, scale(outward, -thick / 2 - dot(subtract(point, centre), outward))),
-  );
-  const sideways = rim.map((_, n) => {
-    const run = subtract(rim[n + 1] ?? rim[1]!, rim[n - 1] ?? rim.at(-2)!);
-    return normalise(cross(outward, run));
-  });
-  addSheet(out, [foot, rim], [sideways, sideways], material);
+  const foot = addBoxing(out, soft, rimOf(panel), material);
   const under = foot.map(() => place(0, -thick / 2, 0));
   const away = foot.map(() => scale(outward, -1));
   addSheet(out, [under, foot], [away, away], material);
-  addLoop(out, rim, 1);
-  addLoop(out, foot, 1);
 }

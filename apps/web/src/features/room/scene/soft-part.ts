@@ -16,6 +16,8 @@ export interface SoftPart {
   thickMm: number;
   /** How far the panel lies within the box, so far down from the middle, mm; absent for a flat one. */
   hollowAt?: (down: number) => number;
+  /** Corners of a panel that is no rectangle, across and down from the middle, clockwise as one looks at it, mm. */
+  outlineMm?: readonly (readonly [number, number])[];
 }
 
 type Prism = Extract<Solid, { shape: 'prism' }>;
@@ -75,10 +77,31 @@ function curved(part: Part, { outlineMm, depthMm }: Prism): SoftPart | undefined
   };
 }
 
+/** A cushion cut to a plan of its own. */
+function outlined(part: Part, { outlineMm, depthMm }: Prism): SoftPart {
+  const [across, y, outward] = partAxes(part.rotationRad);
+  const range = (axis: 0 | 1) => {
+    const values = outlineMm.map((point) => point[axis]);
+    return Math.max(...values) - Math.min(...values);
+  };
+  return {
+    kind: part.role === 'seat-cushion' ? 'seat' : 'back',
+    centre: part.positionMm,
+    across,
+    outward,
+    down: scale(y, -1),
+    widthMm: range(0),
+    lengthMm: range(1),
+    thickMm: depthMm,
+    outlineMm: outlineMm.map(([u, v]) => [u, -v] as const).reverse(),
+  };
+}
+
 /** How a cushion is drawn; undefined for what is not soft. */
 export function softPart(part: Part): SoftPart | undefined {
   if (part.role !== 'seat-cushion' && part.role !== 'back-cushion') return undefined;
   const { solid } = part;
   if (solid.shape === 'box') return boxed(part, solid.sizeMm);
-  return solid.shape === 'prism' && !solid.isPanel ? curved(part, solid) : undefined;
+  if (solid.shape !== 'prism') return undefined;
+  return solid.isPanel ? outlined(part, solid) : curved(part, solid);
 }
