@@ -1,6 +1,6 @@
 import '@testing-library/jest-dom/vitest';
 import { cleanup, configure } from '@testing-library/react';
-import { afterAll, afterEach, beforeAll } from 'vitest';
+import { afterAll, afterEach, beforeAll, vi } from 'vitest';
 import { server } from './server.ts';
 
 // Floating lists ask for these; jsdom has neither.
@@ -22,4 +22,10 @@ afterEach(() => {
   server.resetHandlers();
   localStorage.clear();
 });
-afterAll(() => server.close());
+// The next file finds the same modules, and the browser as it was.
+afterAll(() => {
+  vi.unstubAllGlobals();
+  vi.restoreAllMocks();
+  vi.useRealTimers();
+  server.close();
+});
