@@ -224,7 +224,11 @@ describe('a set from the first account to the upholsterer’s answer', () => {
     await theirs.goto(privateLink);
     await theirs.getByRole('heading', { name: 'Saloon, cushions' }).waitFor();
     expect(await theirs.locator('body').innerText()).toContain('Bottle-green corduroy');
-    expect(await theirs.getByRole('link').allTextContents()).toEqual(['Drawing pack, PDF']);
+    expect(await theirs.getByRole('link').allTextContents()).toEqual([
+      'Drawing pack, PDF',
+      'Schedule (CSV)',
+      'Outlines and panels (DXF)',
+    ]);
 
     await theirs.getByRole('button', { name: 'I can make this as drawn' }).click();
     await theirs.getByText('No name was typed.').waitFor();
