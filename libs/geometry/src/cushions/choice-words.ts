@@ -2,7 +2,7 @@ import type { PieceOf } from '../room/document.ts';
 import { formatLength } from '../units/format-length.ts';
 import type { LengthStyle } from '../units/length-style.ts';
 import { phraseText } from '../units/phrase.ts';
-import { HOLD_DOWN_WORDS, type CushionChoice } from './cushion-choice.ts';
+import { HOLD_DOWN_WORDS, type CushionChoice, type CushionEdge } from './cushion-choice.ts';
 import type { CushionShape } from './cushion-shape.ts';
 import type { RunJoints } from './run-joints.ts';
 import { CLOSURE_WORDS, CONSTRUCTION_WORDS, WELT_WORDS, type CushionMake } from './making/cushion-make.ts';
@@ -10,17 +10,26 @@ import { TUFTING_WORDS, type TuftingChoice } from './tufting-choice.ts';
 import { allWearPhrase } from './wear.ts';
 
 /**
+ * Edges as the sitter sees them.
+ *
+ * @param kind - of a back the back edge is called the top and the front edge the bottom
+ */
+export function edgeWords(kind: 'seat' | 'back'): Record<CushionEdge, string> {
+  const [back, front] = kind === 'seat' ? ['back', 'front'] : ['top', 'bottom'];
+  return { back, front, left: 'sitter’s left', right: 'sitter’s right' };
+}
+
+/**
  * A make in words.
  *
  * @param make - of a cushion
- * @param kind - of a back the back edge is called the top and the front edge the bottom
+ * @param kind - of the cushion
  */
 export function makeWords(
   { construction, closure, closureEdge, welt }: CushionMake,
   kind: 'seat' | 'back',
 ): string {
-  const [back, front] = kind === 'seat' ? ['back', 'front'] : ['top', 'bottom'];
-  const edge = { back, front, left: 'sitter’s left', right: 'sitter’s right' }[closureEdge];
+  const edge = edgeWords(kind)[closureEdge];
   const closed =
     closure === 'stapled' ? CLOSURE_WORDS.stapled : `${CLOSURE_WORDS[closure]} at the ${edge} edge`;
   return `${CONSTRUCTION_WORDS[construction]}, ${closed}, ${WELT_WORDS[welt]}`;

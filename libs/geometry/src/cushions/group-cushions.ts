@@ -1,32 +1,22 @@
 import type { OutlineCorner } from '../outlines/outline.ts';
 import type { CushionEdge } from './cushion-choice.ts';
 import type { CushionGroup, CushionSpec } from './cushion-spec.ts';
-import { mirroredOutline } from './mirrored-shape.ts';
+import { mirroredOutline, otherEdge } from './mirrored-shape.ts';
 import { mirroredWear } from './wear.ts';
 
 /** Lengths are compared on a grid of 1/64 in: fractions of an inch lie on it, so noise of the last digit never parts two. */
 const GRID_MM = 25.4 / 64;
 
-type Hand = CushionSpec['hand'];
-
-const OTHER: Record<Hand, Hand> = { left: 'right', right: 'left', either: 'either' };
-const OTHER_EDGE: Record<CushionEdge, CushionEdge> = {
-  left: 'right',
-  right: 'left',
-  back: 'back',
-  front: 'front',
-};
-
 /** All that a drawing shows of a cushion, or of its mirror image; what follows from it alone is left out. */
 function likeness(spec: CushionSpec, mirrored: boolean): string {
   const { kind, hand, edges, finishedMm, make, foam, curve, buttons, boardLinesMm, datum } = spec;
   const { wallMark: _, side, ...datumLike } = datum;
-  const edge = (one: CushionEdge) => (mirrored ? OTHER_EDGE[one] : one);
+  const edge = (one: CushionEdge) => (mirrored ? otherEdge(one) : one);
   const shown = {
     kind,
-    hand: mirrored ? OTHER[hand] : hand,
+    hand: mirrored ? otherEdge(hand) : hand,
     edges: mirrored ? { ...edges, left: edges.right, right: edges.left } : edges,
-    datumSide: mirrored ? OTHER[side] : side,
+    datumSide: mirrored ? otherEdge(side) : side,
     datumLike,
     finishedMm,
     make: { ...make, closureEdge: edge(make.closureEdge) },

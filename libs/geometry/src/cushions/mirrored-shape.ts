@@ -2,7 +2,9 @@ import type { OutlineCorner } from '../outlines/outline.ts';
 import type { CushionShape } from './cushion-shape.ts';
 
 const OTHER: Readonly<Record<string, string>> = { left: 'right', right: 'left' };
-const otherEdge = <E extends string>(edge: E): E => (OTHER[edge] ?? edge) as E;
+
+/** An edge, end or hand of the mirror image: left and right change places, all else stays. */
+export const otherEdge = <E extends string>(edge: E): E => (OTHER[edge] ?? edge) as E;
 
 /**
  * An outline mirrored left to right about the middle of its width, still anticlockwise.

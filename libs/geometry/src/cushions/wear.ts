@@ -1,4 +1,5 @@
 import { z } from 'zod';
+import { otherEdge } from './mirrored-shape.ts';
 import { joined, phrase, type Phrase } from '../units/phrase.ts';
 
 const length = (min: number, max: number) => z.number().min(min).max(max);
@@ -124,7 +125,7 @@ export function mirroredWear({ place, areaMm, ...rest }: WearArea): WearArea {
     ...rest,
     place: OTHER_PLACE[place] ?? place,
     ...(areaMm && {
-      areaMm: { ...areaMm, fromEnd: areaMm.fromEnd === 'left' ? ('right' as const) : ('left' as const) },
+      areaMm: { ...areaMm, fromEnd: otherEdge(areaMm.fromEnd) },
     }),
   };
 }

@@ -4,7 +4,7 @@ import { OFF_JOINT_MM } from '../cushions/cushion-warnings.ts';
 import { foamOfCushion } from '../cushions/foam-of-cushion.ts';
 import { groupCushions } from '../cushions/group-cushions.ts';
 import { keptCushionRules, type CushionRules } from '../cushions/workshop-cushions.ts';
-import { outlineExtent } from '../outlines/outline.ts';
+import { isRectangle, outlineExtent } from '../outlines/outline.ts';
 import { clothOfOrder, coverFaults, type ClothOfOrder } from './order-cloth.ts';
 import type { OrderCover } from './order-cover.ts';
 import { orderTotals, type OrderTotals } from './order-totals.ts';
@@ -106,14 +106,6 @@ function scheduleRow(
     covers: cloths.filter((one) => one.marks.includes(marks[0] ?? '')).map(({ cover }) => cover.name),
     needsTemplate: !isRectangle(outline),
   };
-}
-
-function isRectangle(outline: CushionSpec['outline']): boolean {
-  if (outline.length !== 4 || outline.some(({ radiusMm }) => radiusMm > 0)) return false;
-  return outline.every(({ at }, i) => {
-    const next = outline[(i + 1) % 4]!.at;
-    return Math.abs(next[0] - at[0]) < 1e-6 || Math.abs(next[1] - at[1]) < 1e-6;
-  });
 }
 
 function buttonSheet(marks: string[], { datum, buttons }: CushionSpec): ButtonSheet {

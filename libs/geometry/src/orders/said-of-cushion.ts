@@ -1,10 +1,10 @@
-import { HOLD_DOWN_WORDS, type CushionEdge } from '../cushions/cushion-choice.ts';
-import { makeWords } from '../cushions/choice-words.ts';
+import { HOLD_DOWN_WORDS } from '../cushions/cushion-choice.ts';
+import { edgeWords, makeWords } from '../cushions/choice-words.ts';
 import type { CushionSpec } from '../cushions/cushion-spec.ts';
 import { FULLNESS_RULES } from '../cushions/tufting.ts';
 import { TUFTING_WORDS } from '../cushions/tufting-choice.ts';
 import { allWearPhrase } from '../cushions/wear.ts';
-import { outlineStretches, type OutlineCorner } from '../outlines/outline.ts';
+import { isRectangle, outlineStretches, type OutlineCorner } from '../outlines/outline.ts';
 import { joined, phrase, type Phrase } from '../units/phrase.ts';
 
 /** What an order says of each of its cushions, in the order of its sheet. */
@@ -28,10 +28,8 @@ export const SAID_OF_CUSHION = [
 ] as const;
 export type SaidOfCushion = (typeof SAID_OF_CUSHION)[number];
 
-const EDGE_WORDS: Record<CushionSpec['kind'], Record<CushionEdge, string>> = {
-  seat: { back: 'back', front: 'front', left: 'sitter’s left', right: 'sitter’s right' },
-  back: { back: 'top', front: 'bottom', left: 'sitter’s left', right: 'sitter’s right' },
-};
+/** A side that is less off square does not show on any paper, millimetres. */
+const SQUARE_MM = 0.05;
 
 /**
  * All that an order says of one cushion, to set beside what was said before.
@@ -72,7 +70,7 @@ export function saidOfCushion(spec: CushionSpec): Record<SaidOfCushion, Phrase> 
       ],
       '; ',
     ),
-    camera: phrase`${cameraSides.map((edge) => EDGE_WORDS[kind][edge]).join(', ')}`,
+    camera: phrase`${cameraSides.map((edge) => edgeWords(kind)[edge]).join(', ')}`,
     'hold-down': phrase`${holdDown ? HOLD_DOWN_WORDS[holdDown] : ''}`,
     wear: allWearPhrase(wear, kind),
     'cushion-notes': phrase`${notes}`,
@@ -111,8 +109,8 @@ function tuftingPhrase({ tufting: { kind, pullMm, field, fullness } }: CushionSp
 
 /** A plain rectangle is said by its sizes alone; of any other outline every edge and radius, round once. */
 function outlinePhrase(outline: readonly OutlineCorner[], kind: CushionSpec['kind']): Phrase {
-  if (isRectangle(outline)) return phrase`plain rectangle`;
-  const names: Readonly<Record<string, string>> = EDGE_WORDS[kind];
+  if (isRectangle(outline, SQUARE_MM)) return phrase`plain rectangle`;
+  const names: Readonly<Record<string, string>> = edgeWords(kind);
   return joined(
     outlineStretches(outline).map((stretch) =>
       stretch.kind === 'arc'
@@ -122,10 +120,3 @@ function outlinePhrase(outline: readonly OutlineCorner[], kind: CushionSpec['kin
     ', ',
   );
 }
-
-const isRectangle = (outline: readonly OutlineCorner[]): boolean =>
-  outline.length === 4 &&
-  outline.every(({ at, radiusMm }, i) => {
-    const next = outline[(i + 1) % 4]!.at;
-    return radiusMm === 0 && (Math.abs(at[0] - next[0]) < 0.05 || Math.abs(at[1] - next[1]) < 0.05);
-  });

@@ -235,3 +235,17 @@ export function outlinePoints(
     });
   });
 }
+
+/**
+ * Whether an outline is a rectangle that lies square to the page.
+ *
+ * @param corners - anticlockwise
+ * @param withinMm - a side may be so much off square
+ */
+export function isRectangle(corners: readonly OutlineCorner[], withinMm = EPSILON_MM): boolean {
+  if (corners.length !== 4 || corners.some(({ radiusMm }) => radiusMm > 0)) return false;
+  return corners.every(({ at }, i) => {
+    const [dx, dy] = minus(corners[(i + 1) % 4]!.at, at);
+    return Math.abs(dx) < withinMm || Math.abs(dy) < withinMm;
+  });
+}

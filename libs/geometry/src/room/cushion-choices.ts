@@ -1,7 +1,7 @@
 import type { CushionChoice } from '../cushions/cushion-choice.ts';
 import { cushionKey, cushionKeyParts } from '../cushions/cushion-key.ts';
 import { cushionRuns, type CushionedPiece } from '../cushions/cushion-runs.ts';
-import { mirroredShape } from '../cushions/mirrored-shape.ts';
+import { mirroredShape, otherEdge } from '../cushions/mirrored-shape.ts';
 import { mirroredWear } from '../cushions/wear.ts';
 import type { Piece, SetDocument } from './document.ts';
 
@@ -125,15 +125,13 @@ function choicesOf(choices: SetDocument['cushions'], pieceId: string) {
   });
 }
 
-const OTHER_SIDE = { left: 'right', right: 'left', back: 'back', front: 'front' } as const;
-
 function mirroredChoice(choice: CushionChoice): CushionChoice {
   const { make, shape, cameraSides, wear } = choice;
   return {
     ...choice,
-    ...(make && { make: { ...make, closureEdge: OTHER_SIDE[make.closureEdge] } }),
+    ...(make && { make: { ...make, closureEdge: otherEdge(make.closureEdge) } }),
     ...(shape && { shape: mirroredShape(shape) }),
-    ...(cameraSides && { cameraSides: cameraSides.map((side) => OTHER_SIDE[side]) }),
+    ...(cameraSides && { cameraSides: cameraSides.map(otherEdge) }),
     ...(wear && { wear: wear.map(mirroredWear) }),
   };
 }

@@ -2,11 +2,11 @@ import {
   CLOSURE_WORDS,
   CONSTRUCTION_WORDS,
   CUSHION_EDGES,
+  edgeWords,
   HOLD_DOWN_WORDS,
   HOLD_DOWNS,
   makeWords,
   WELT_WORDS,
-  type CushionEdge,
   type CushionMake,
   type HoldDown,
 } from '@settlewright/geometry';
@@ -16,12 +16,6 @@ import type { Making } from './use-make.ts';
 
 const optionsOf = <T extends string>(words: Record<T, string>) =>
   (Object.entries(words) as [T, string][]).map(([value, text]) => ({ value, words: text }));
-
-/** Edges as the sitter sees them; those of a back cushion are called top and bottom. */
-export function edgeWords(kind: 'seat' | 'back'): Record<CushionEdge, string> {
-  const [back, front] = kind === 'seat' ? ['back', 'front'] : ['top', 'bottom'];
-  return { back, front, left: 'sitter’s left', right: 'sitter’s right' };
-}
 
 const UNSAID = 'not-said';
 
