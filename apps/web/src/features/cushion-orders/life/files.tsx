@@ -1,4 +1,4 @@
-import { useId, useState } from 'react';
+import { useState } from 'react';
 import { Button } from '@/components/button.tsx';
 import { Notice } from '@/components/notice.tsx';
 import { RuleHeading } from '@/components/rule-heading.tsx';
@@ -7,6 +7,7 @@ import { dayWords } from '@/lib/dates.ts';
 import { keepFile } from '@/lib/download.ts';
 import { sayProblem } from '@/lib/problem.ts';
 import { type Desk, openFile, type OrderFile, useAddFile, useFileUrl, useRemoveFile } from './desk.ts';
+import { FileInput } from './file-input.tsx';
 import { MarkChoice } from './mark-choice.tsx';
 
 interface FilesProps {
@@ -72,7 +73,6 @@ function Row({ desk, file }: { desk: Desk; file: OrderFile }) {
 /** Photographs and papers of both sides; nobody else can open them. */
 export function Files({ desk, files, marks, open }: FilesProps) {
   const add = useAddFile(desk);
-  const id = useId();
   const [cushionMark, setMark] = useState<string | null>(null);
   return (
     <section aria-label="Photographs and papers" className="mb-8">
@@ -87,27 +87,15 @@ export function Files({ desk, files, marks, open }: FilesProps) {
       {open && (
         <div className="grid gap-3 pt-3 print:hidden">
           <MarkChoice label="Of" marks={marks} mark={cushionMark} onChange={setMark} />
-          <label htmlFor={id} className="text-sm font-medium">
-            Add a photograph or a PDF
-          </label>
-          <input
-            id={id}
-            type="file"
+          <FileInput
+            label="Add a photograph or a PDF"
             accept="image/jpeg,image/png,image/webp,application/pdf"
-            aria-describedby={`${id}-about`}
-            disabled={add.isPending}
-            className="w-full text-sm"
-            onChange={(event) => {
-              const [file] = event.target.files ?? [];
-              event.target.value = '';
-              if (file)
-                add.mutate({ file, cushionMark }, { onSuccess: () => announce(`${file.name} added.`) });
-            }}
+            about="JPEG, PNG, WebP or PDF, at most 15 MB. Where and when a photograph was taken is cut out of it."
+            busy={add.isPending}
+            onPick={(file) =>
+              add.mutate({ file, cushionMark }, { onSuccess: () => announce(`${file.name} added.`) })
+            }
           />
-          <p id={`${id}-about`} className="text-xs text-ink-2">
-            JPEG, PNG, WebP or PDF, at most 15 MB. Where and when a photograph was taken is cut out of it.
-          </p>
-          {add.isPending && <p className="text-sm text-ink-2">Sending the file…</p>}
           {add.error && <Notice tone="wont">{sayProblem(add.error)}</Notice>}
         </div>
       )}

@@ -2,6 +2,7 @@ import { useId } from 'react';
 import { announce } from '@/lib/announce.ts';
 import { sayProblem } from '@/lib/problem.ts';
 import { type Desk, type OrderFile, useAddFile } from './desk.ts';
+import { FileInput } from './file-input.tsx';
 
 interface InspectPhotosProps {
   desk: Desk;
@@ -46,22 +47,14 @@ export function InspectPhotos({ desk, photos, mark, chosen, error, onChange }: I
           {photo.cushionMark ? `${photo.cushionMark}, ${photo.name}` : photo.name}
         </label>
       ))}
-      <label htmlFor={id} className="mt-2 block text-sm font-medium">
-        Add a photograph
-      </label>
-      <input
-        id={id}
-        type="file"
-        accept="image/jpeg,image/png,image/webp"
-        disabled={add.isPending}
-        className="mt-1 w-full text-sm"
-        onChange={(event) => {
-          const [file] = event.target.files ?? [];
-          event.target.value = '';
-          if (file) send(file);
-        }}
-      />
-      {add.isPending && <p className="text-sm text-ink-2">Sending the file…</p>}
+      <div className="mt-2">
+        <FileInput
+          label="Add a photograph"
+          accept="image/jpeg,image/png,image/webp"
+          busy={add.isPending}
+          onPick={send}
+        />
+      </div>
       {fault && (
         <p id={`${id}-fault`} role="alert" className="text-sm font-medium text-wont">
           {fault}

@@ -14,13 +14,14 @@ import type { SeatPrint } from './seat-print.ts';
 import type { SoftPart } from './soft-part.ts';
 import type { SolidSink } from './solid-arrays.ts';
 import { between, crossings, holds, inset, strips, withinMm, type Point } from './panel-outline.ts';
-import { normalise, scale } from './vectors.ts';
+import { add, normalise, scale } from './vectors.ts';
 
 /** Sides of the squares a panel is laid in: close where somebody sits or leans on it, mm. */
 const PRESSED_STEP_MM = 56;
 const FREE_STEP_MM = 110;
 /** The slope of the panel is read over this, mm. */
 const SLOPE_MM = 2;
+
 /**
  * A cushion cut to a plan of its own, as it is upholstered: see `addCushion`. Its rounded edge follows the outline; within
  * it the panel is laid in squares, cut where the edge begins, so that it can be pressed in anywhere.
@@ -46,20 +47,16 @@ export function addOutlinedCushion(
     const top = thick / 2 - round + rise - sagAt(thick, withinMm(outline, u, v));
     return Math.max(LEAST_MM - thick / 2, top - press(place(u, top, v)));
   };
+  /** A way in the room, of so much across, outwards and down. */
+  const directed = (across: number, out: number, down: number): Vec3 =>
+    add(add(scale(soft.across, across), scale(outward, out)), scale(soft.down, down));
   const levelNormal = ([u, v]: Point): Vec3 => {
     const [low, across, along] = [
       heightAt([u, v], 1),
       heightAt([u + SLOPE_MM, v], 1),
       heightAt([u, v + SLOPE_MM], 1),
     ];
-    const tilt = [(low - across) / SLOPE_MM, (low - along) / SLOPE_MM] as const;
-    return normalise(
-      [0, 1, 2].map((n) => outward[n]! + soft.across[n]! * tilt[0] + soft.down[n]! * tilt[1]) as [
-        number,
-        number,
-        number,
-      ],
-    );
+    return normalise(directed((low - across) / SLOPE_MM, 1, (low - along) / SLOPE_MM));
   };
 
   // The rounded edge, from the rim inwards.
@@ -80,8 +77,7 @@ export function addOutlinedCushion(
       const [du, dv] = [rim[0] - level[0], rim[1] - level[1]];
       const lean = (1 - edge) / (Math.hypot(du, dv) || 1);
       const up = Math.sqrt(1 - (1 - edge) ** 2);
-      const side = place(du * lean, up, dv * lean);
-      return normalise([side[0] - soft.centre[0], side[1] - soft.centre[1], side[2] - soft.centre[2]]);
+      return normalise(directed(du * lean, up, dv * lean));
     }),
   );
   addSheet(out, cover, facing, material);
