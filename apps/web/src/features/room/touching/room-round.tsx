@@ -61,7 +61,7 @@ export function RoomRound({ picture, placeId }: Props) {
       <p className="text-ink-3">
         Between the bodies as drawn and the parts; the seat and the back they rest on are left out. Guidance:
         no check reads it.{' '}
-        {`Measured on the skin of the bodies, right within ${style.system === 'millimetres' ? '3 mm' : '1/8″'}.`}
+        {`What is measured on the skin is right within ${style.system === 'millimetres' ? '3 mm' : '1/8″'}.`}
       </p>
     </div>
   );
