@@ -9,55 +9,39 @@ const SITTERS = 12;
 /** Bodies come one by one from a worker: nothing of that is to fall into the figures. */
 const SETTLE_MS = 15_000;
 const PAUSE_MS = 3000;
-const TAKEN_MS = 2000;
 
 const middleOf = ({ x, y, width, height }) => ({ x: x + width / 2, y: y + height / 2 });
 
 const grip = (page, name) =>
   page.getByRole('button', { name: new RegExp(`^Bench .*${name}.*arrows change it$`) });
 
-/** Takes hold of the selected bench on the plan, wherever it can be had, and carries it. */
-async function carry(page) {
-  const [left, right] = await Promise.all(
-    ['length, left end', 'length, right end'].map(async (end) =>
-      middleOf(await grip(page, end).boundingBox()),
-    ),
-  );
-  for (const asideShare of [0.2, 0.3, 0.5, 0.6, 0.8]) {
-    for (const byPx of [-50, -56, -62, -68]) {
-      const x = left.x + (right.x - left.x) * asideShare;
-      const spot = { x, y: (left.y + right.y) / 2 + byPx };
-      if (await isTaken(page, spot)) return dragFrom(page, spot);
-    }
-  }
-  throw new Error('The bench cannot be taken hold of.');
-}
-
-/** Whether a press there takes the bench, and not the sheet; what it moved is put back. */
-async function isTaken(page, { x, y }) {
-  const bare = await page.evaluate(
+const isBare = (page, { x, y }) =>
+  page.evaluate(
     ([x, y]) => {
       const there = document.elementFromPoint(x, y);
       return !there?.closest('button') && !!there?.closest('[data-scene]');
     },
     [x, y],
   );
-  if (!bare) return false;
-  await page.mouse.move(x, y);
-  await page.mouse.down();
-  await page.mouse.move(x + 10, y + 10);
-  const taken = await page
-    .locator('[aria-busy="true"]')
-    .first()
-    .waitFor({ state: 'attached', timeout: TAKEN_MS })
-    .then(
-      () => true,
-      () => false,
-    );
-  await page.mouse.move(x, y);
-  await page.keyboard.press('Escape');
-  await page.mouse.up();
-  return taken;
+
+/** Takes hold of the selected bench on the plan, wherever it can be had, and carries it. */
+async function carry(page) {
+  for (const asideShare of [0.2, 0.3, 0.5, 0.6, 0.8]) {
+    for (const byPx of [-50, -56, -62, -68]) {
+      // Asked for each time: a press beside the bench has moved the sheet.
+      const [left, right] = await Promise.all(
+        ['length, left end', 'length, right end'].map(async (end) =>
+          middleOf(await grip(page, end).boundingBox()),
+        ),
+      );
+      const x = left.x + (right.x - left.x) * asideShare;
+      const spot = { x, y: (left.y + right.y) / 2 + byPx };
+      const carried = (await isBare(page, spot)) && (await dragFrom(page, spot));
+      if (carried) return carried;
+      await page.waitForTimeout(PAUSE_MS);
+    }
+  }
+  throw new Error('The bench cannot be taken hold of.');
 }
 
 export async function run() {
@@ -94,6 +78,7 @@ export async function run() {
   const end = grip(page, 'length, right end');
   await end.waitFor();
   const pulled = await dragFrom(page, middleOf(await end.boundingBox()));
+  if (!pulled) throw new Error('The end of the bench cannot be pulled.');
   await page.waitForTimeout(PAUSE_MS);
   const carried = await carry(page);
   await browser.close();

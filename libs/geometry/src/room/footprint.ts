@@ -13,13 +13,17 @@ export interface Footprint {
   corners: readonly (readonly [number, number])[];
 }
 
+const kept = new WeakMap<Piece, Footprint>();
+
 /**
  * The rectangle a piece covers, seen from above.
  *
- * @param piece - any piece; a beam covers what lies below it
+ * @param piece - any piece, not changed afterwards; a beam covers what lies below it
  * @returns limits in its own frame and corners in the room, millimetres
  */
 export function footprint(piece: Piece): Footprint {
+  const known = kept.get(piece);
+  if (known) return known;
   const { minMm, maxMm } = pieceEnvelope(piece);
   const [x0, , z0] = minMm;
   const [x1, , z1] = maxMm;
@@ -27,5 +31,13 @@ export function footprint(piece: Piece): Footprint {
     const [rx, , rz] = toRoom(piece.at, [x, 0, z]);
     return [rx, rz] as const;
   };
-  return { x0, x1, z0, z1, corners: [corner(x0, z1), corner(x1, z1), corner(x1, z0), corner(x0, z0)] };
+  const made: Footprint = {
+    x0,
+    x1,
+    z0,
+    z1,
+    corners: [corner(x0, z1), corner(x1, z1), corner(x1, z0), corner(x0, z0)],
+  };
+  kept.set(piece, made);
+  return made;
 }

@@ -73,7 +73,10 @@ export function drawnPicture(document: SetDocument, counted: RoomPicture): Drawn
   return {
     ...counted,
     document,
-    parts: deriveParts(document),
+    /** Asked for where a section cuts them; else the pieces alone are drawn. */
+    get parts() {
+      return deriveParts(document);
+    },
     carried,
     reshaped: new Set(anew.map(({ id }) => id)),
   };

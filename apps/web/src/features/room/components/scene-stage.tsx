@@ -1,5 +1,5 @@
 import { tapeLines, type Piece } from '@settlewright/geometry';
-import { lazy, Suspense, useId, useMemo, useRef } from 'react';
+import { lazy, Suspense, useId, useMemo, useRef, useState } from 'react';
 import { LoadingLine } from '@/components/loading.tsx';
 import { useTheme } from '@/lib/theme.ts';
 import { useDoubtKey } from '../bodies/doubt-toggle.tsx';
@@ -10,9 +10,11 @@ import type { Choosing } from '../hooks/use-choosing.ts';
 import type { GroupActions } from '../hooks/use-group-actions.ts';
 import type { PieceActions } from '../hooks/use-piece-actions.ts';
 import { useSceneHand } from '../hooks/use-scene-hand.ts';
+import { useStill } from '../hooks/use-still.ts';
 import { useStageKeys } from '../hooks/use-stage-keys.ts';
 import { useView } from '../hooks/use-view.ts';
 import type { RoomAddress } from '../hooks/use-address.ts';
+import { createLabelBoxes } from '../overlay/box.ts';
 import { Overlay } from '../overlay/overlay.tsx';
 import { tapesAtRest } from '../overlay/tape-words.ts';
 import type { RoomPicture } from '../picture.ts';
@@ -32,7 +34,6 @@ import { linesOnScene, useMeasures, useMeasuringScene } from '../tape-tool/use-m
 import { useTapeHand } from '../tape-tool/use-tape-hand.ts';
 import { GapsOnScene } from '../touching/gaps-on-scene.tsx';
 import { WayOnScene } from '../ways/way-on-scene.tsx';
-import { DrawnScene, useStill } from './drawn-scene.tsx';
 import { EyeMark } from './eye-mark.tsx';
 import { SceneErrorBoundary } from './scene-error-boundary.tsx';
 import { ScaleBar } from './scale-bar.tsx';
@@ -49,6 +50,7 @@ const FADE = {
 const NOTHING: readonly string[] = [];
 const NOBODY: RoomPicture['bodies'] = [];
 
+const SceneCanvas = lazy(() => import('../scene/scene-canvas.tsx'));
 const HandleLayer = lazy(() => import('../handles/handle-layer.tsx'));
 
 interface Props {
@@ -68,6 +70,7 @@ export function SceneStage({ picture, piece, address, actions, several, onOpenCe
   const lit = useRoom((state) => state.litCellId);
   const sheet = useRef<HTMLDivElement>(null);
   const readOut = useRef<HTMLDivElement>(null);
+  const [labels] = useState(createLabelBoxes);
   const about = useId();
   const { clientView } = address;
   const isMoving = useIsMoving();
@@ -165,12 +168,13 @@ export function SceneStage({ picture, piece, address, actions, several, onOpenCe
           if (event.ctrlKey) view.zoomBy(event.deltaY < 0 ? 1.1 : 1 / 1.1);
         }}
         {...(clientView ? hand.handlers : (tapeHand ?? hand.handlers))}
-        className="relative min-h-0 flex-1 touch-pan-y overflow-hidden outline-offset-[-2px] select-none max-tablet:h-[21rem] max-tablet:flex-none"
+        className="@container relative min-h-0 flex-1 touch-pan-y overflow-hidden outline-offset-[-2px] select-none max-tablet:h-[21rem] max-tablet:flex-none"
       >
         <SceneErrorBoundary>
           <div className="absolute inset-0" style={FADE}>
             <Suspense fallback={<LoadingLine words="Drawing the set" />}>
-              <DrawnScene
+              <SceneCanvas
+                following
                 picture={picture}
                 controller={view.controller}
                 letter={letter}
@@ -190,6 +194,7 @@ export function SceneStage({ picture, piece, address, actions, several, onOpenCe
         </SceneErrorBoundary>
         <Overlay
           controller={view.controller}
+          labels={labels}
           namesAtHeads={letter === 'D'}
           bodies={bodies}
           tapes={[...shown, ...measured]}
@@ -205,6 +210,7 @@ export function SceneStage({ picture, piece, address, actions, several, onOpenCe
               key={piece.id}
               piece={piece}
               controller={view.controller}
+              labels={labels}
               cut={view.cut}
               narrow={view.narrow}
             />

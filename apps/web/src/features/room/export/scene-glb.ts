@@ -32,14 +32,9 @@ function sceneOf(
       const own = parts.filter((part) => part.pieceId === piece.id && part.material === key);
       const material = materials[n];
       if (own.length === 0 || !material) return;
-      const { positions, normals } = mergeParts(own);
-      const mesh = new Mesh(
-        surfaceOf(
-          positions.map((mm) => mm * METRES),
-          normals,
-        ),
-        material,
-      );
+      const { positions, normals, indices } = mergeParts(own);
+      const inMetres = positions.map((mm) => mm * METRES);
+      const mesh = new Mesh(surfaceOf({ positions: inMetres, normals, indices }), material);
       mesh.name = `${piece.mark} ${key}`;
       group.add(mesh);
     });

@@ -12,6 +12,7 @@ import { act, fireEvent, render, screen } from '@testing-library/react';
 import userEvent from '@testing-library/user-event';
 import { beforeEach, describe, expect, it, vi } from 'vitest';
 import { useAnnouncement } from '@/lib/announce.ts';
+import { createLabelBoxes } from '../overlay/box.ts';
 import { createPictureMaker } from '../picture.ts';
 import { RoomContext, usePiece, type RoomSurroundings } from '../room-context.tsx';
 import { RoomStoreProvider } from '../room-store-provider.tsx';
@@ -35,12 +36,18 @@ const FRONT: ViewFrame = {
   depthMm: [5000, -5000],
 };
 
+const FREE = createLabelBoxes();
+
 let store: RoomStore;
 let leave: () => void;
 
 function Layer({ controller }: { controller: ReturnType<typeof createViewController> }) {
   const piece = usePiece(added.pieceId);
-  return piece && <HandleLayer piece={piece} controller={controller} cut={undefined} narrow={false} />;
+  return (
+    piece && (
+      <HandleLayer piece={piece} controller={controller} labels={FREE} cut={undefined} narrow={false} />
+    )
+  );
 }
 
 function open(change: Partial<PieceOf<'bench'>> = {}) {

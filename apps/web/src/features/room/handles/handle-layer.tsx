@@ -1,22 +1,25 @@
 import { pieceHandles, type Piece } from '@settlewright/geometry';
 import { useCallback, useEffect, useLayoutEffect, useMemo, useRef } from 'react';
+import type { LabelBoxes } from '../overlay/box.ts';
 import type { ViewController } from '../scene/view-controller.ts';
 import { isBehind, type Cut } from '../scene/views.ts';
 import { drawnDocument, useRoom } from '../store.ts';
 import { HandleGrip } from './handle-grip.tsx';
-import { placeHandles, type Box } from './handle-layout.ts';
+import { placeHandles } from './handle-layout.ts';
 
 interface Props {
   /** The selected piece. */
   piece: Piece;
   controller: ViewController;
+  /** Where names and flags stand just now. */
+  labels: LabelBoxes;
   cut: Cut | undefined;
   /** On a narrow sheet only the numbers of the first sentence have room. */
   narrow: boolean;
 }
 
 /** Handles of the selected piece over the picture. React makes them; the view moves them. */
-export default function HandleLayer({ piece, controller, cut, narrow }: Props) {
+export default function HandleLayer({ piece, controller, labels, cut, narrow }: Props) {
   const layer = useRef<HTMLDivElement>(null);
   const inHand = useRef<string>(undefined);
   const committed = useRoom((state) => state.document.pieces.find(({ id }) => id === piece.id));
@@ -40,7 +43,7 @@ export default function HandleLayer({ piece, controller, cut, narrow }: Props) {
       frame,
       controller.viewport(),
       shown.filter(({ id }) => known.has(id)),
-      labelsOn(root),
+      labels.now(),
       inHand.current,
     );
     for (const element of elements) {
@@ -52,7 +55,7 @@ export default function HandleLayer({ piece, controller, cut, narrow }: Props) {
         .querySelector('[data-arrow]')
         ?.setAttribute('transform', `rotate(${((at.angleRad * 180) / Math.PI).toFixed(1)})`);
     }
-  }, [controller, shown]);
+  }, [controller, labels, shown]);
 
   useLayoutEffect(layOut);
   // Anew after each render, as the labels do: handles keep clear of where those have just gone.
@@ -76,21 +79,4 @@ export default function HandleLayer({ piece, controller, cut, narrow }: Props) {
       ))}
     </div>
   );
-}
-
-/** Where flags and names stand on the sheet just now. */
-function labelsOn(root: HTMLElement): Box[] {
-  const sheet = root.getBoundingClientRect();
-  const labels = root.parentElement?.querySelectorAll<HTMLElement>('[data-flag], [data-name]') ?? [];
-  return [...labels]
-    .filter(({ style }) => style.visibility !== 'hidden')
-    .map((label) => {
-      const box = label.getBoundingClientRect();
-      return {
-        left: box.left - sheet.left,
-        right: box.right - sheet.left,
-        top: box.top - sheet.top,
-        bottom: box.bottom - sheet.top,
-      };
-    });
 }

@@ -1,14 +1,7 @@
 import type { Handle } from '@settlewright/geometry';
+import { boxAt, meet, type Box } from '../overlay/box.ts';
 import { add, scale } from '../scene/vectors.ts';
 import { pixelsPerMm, project, type ViewFrame, type Viewport } from '../scene/view-frame.ts';
-
-/** Edges of something on the sheet, CSS pixels. */
-export interface Box {
-  left: number;
-  right: number;
-  top: number;
-  bottom: number;
-}
 
 /** Where the button of a handle stands, and which way its arrow points on the sheet. */
 export interface PlacedHandle {
@@ -37,15 +30,7 @@ const OFFSETS: readonly (readonly [number, number])[] = [
   [4, -44],
 ];
 
-const boxAt = (x: number, y: number): Box => ({
-  left: x - HANDLE_PX / 2,
-  right: x + HANDLE_PX / 2,
-  top: y - HANDLE_PX / 2,
-  bottom: y + HANDLE_PX / 2,
-});
-
-const meet = (a: Box, b: Box): boolean =>
-  a.left < b.right + GAP && b.left < a.right + GAP && a.top < b.bottom + GAP && b.top < a.bottom + GAP;
+const buttonAt = (x: number, y: number): Box => boxAt(x, y, HANDLE_PX, HANDLE_PX);
 
 /**
  * Finds a place for each handle outside its piece, clear of what stands there and of each other. A handle that
@@ -78,11 +63,11 @@ export function placeHandles(
     const free = held
       ? spots[0]
       : spots.find(({ x, y }) => {
-          const box = boxAt(x, y);
-          return isInside(box) && !full.some((other) => meet(box, other));
+          const box = buttonAt(x, y);
+          return isInside(box) && !full.some((other) => meet(box, other, GAP));
         });
     if (!free) continue;
-    full.push(boxAt(free.x, free.y));
+    full.push(buttonAt(free.x, free.y));
     placed.set(handle.id, { ...free, angleRad: Math.atan2(uy, ux) });
   }
   return placed;

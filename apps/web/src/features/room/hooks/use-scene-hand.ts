@@ -8,6 +8,7 @@ import {
 } from '@settlewright/geometry';
 import { useEffect, useRef, type PointerEvent, type RefObject } from 'react';
 import { announce } from '@/lib/announce.ts';
+import { showReadOut } from '../components/read-out.ts';
 import type { RoomPicture } from '../picture.ts';
 import { nameMove, nameMoves, readOutMove } from '../move-words.ts';
 import { useSurroundings } from '../room-context.tsx';
@@ -164,7 +165,8 @@ export function useSceneHand(options: {
             )
           : movePiece(base, piece.id, snapped.at);
       hand.snapped = snapped;
-      showReadOut(readOutMove(piece.at, snapped.at, snapped.snappedTo, style), x, y);
+      const words = readOutMove(piece.at, snapped.at, snapped.snappedTo, style);
+      showReadOut(readOut.current, words, x, y);
       cancelAnimationFrame(request.current);
       request.current = requestAnimationFrame(() => {
         if (wanted.current) store.getState().showMoving(wanted.current);
@@ -178,27 +180,11 @@ export function useSceneHand(options: {
     hand.lastY = y;
   }
 
-  function showReadOut(words: string, x: number, y: number) {
-    const element = readOut.current;
-    if (!element) return;
-    element.replaceChildren(words);
-    element.toggleAttribute('hidden', false);
-    const room = (element.parentElement?.clientWidth ?? 0) - element.offsetWidth - 4;
-    element.style.setProperty(
-      'transform',
-      `translate(${Math.max(4, Math.min(x + 14, room))}px, ${Math.max(4, y - 34)}px)`,
-    );
-  }
-
-  function hideReadOut() {
-    readOut.current?.toggleAttribute('hidden', true);
-  }
-
   function end() {
     cancelAnimationFrame(request.current);
     const hand = drag.current;
     drag.current = null;
-    hideReadOut();
+    showReadOut(readOut.current, undefined);
     if (hand?.piece && hand.moving && hand.snapped && wanted.current) {
       const { piece, pieces, snapped } = hand;
       const step =
@@ -242,7 +228,7 @@ export function useSceneHand(options: {
 
   function cancel() {
     cancelAnimationFrame(request.current);
-    hideReadOut();
+    showReadOut(readOut.current, undefined);
     if (drag.current?.piece) store.getState().showPreview(null);
     drag.current = null;
     wanted.current = null;

@@ -1,7 +1,8 @@
 import type { LetterCamera, NamedView } from '@settlewright/geometry';
-import { useEffect, useLayoutEffect, useMemo, useRef, useState, type RefObject } from 'react';
+import { useCallback, useEffect, useLayoutEffect, useMemo, useRef, useState, type RefObject } from 'react';
 import { flushSync } from 'react-dom';
 import type { RoomPicture } from '../picture.ts';
+import { createRest } from '../rest.ts';
 import { union } from '../scene/bounds.ts';
 import { boundsToShow, cutThrough } from '../scene/focus.ts';
 import { createViewController, type ViewController } from '../scene/view-controller.ts';
@@ -47,6 +48,24 @@ const handOf = ({ zoom, panMm, azimuthDeg, elevationDeg }: LetterCamera): Hand =
   azimuth: (azimuthDeg * Math.PI) / 180,
   elevation: (elevationDeg * Math.PI) / 180,
 });
+
+/** The hand while it moves the sheet: the page learns of it when it rests. */
+function createMovingHand(settle: (hand: Hand) => void) {
+  let hand = START;
+  const resting = createRest(() => settle(hand));
+  return {
+    now: () => hand,
+    move: (next: Hand) => {
+      hand = next;
+      resting.go();
+    },
+    stand: (next: Hand) => {
+      hand = next;
+      resting.stop();
+    },
+    stop: resting.stop,
+  };
+}
 
 /** The frame of the present view: letter, size of the sheet, zoom and pan put together. */
 export function useView(
@@ -97,18 +116,33 @@ export function useView(
   }, [sheet]);
 
   const last = useRef<{ letter: SceneView; zoom: number } | null>(null);
+  const [moving] = useState(() => createMovingHand(setHand));
+  const show = useCallback(
+    (by: Hand, move: boolean) => {
+      if (size.width === 0) return;
+      const insets = insetsOf(size);
+      if (letter !== 'lens')
+        controller.show(frameFor({ letter, bounds, viewport: size, insets, cut, ...by }), move);
+      else if (camera?.kind === 'lens') controller.show(lensFrame(camera, size, insets), move);
+    },
+    [controller, letter, bounds, size, cut, camera],
+  );
   useLayoutEffect(() => {
     if (size.width === 0) return;
     controller.resize(size);
     const move = last.current !== null && (last.current.letter !== letter || last.current.zoom !== hand.zoom);
     last.current = { letter, zoom: hand.zoom };
-    const insets = insetsOf(size);
-    if (letter !== 'lens')
-      controller.show(frameFor({ letter, bounds, viewport: size, insets, cut, ...hand }), move);
-    else if (camera?.kind === 'lens') controller.show(lensFrame(camera, size, insets), move);
-  }, [controller, letter, bounds, size, cut, hand, camera]);
+    moving.stand(hand);
+    show(hand, move);
+  }, [controller, letter, size, hand, moving, show]);
 
-  useEffect(() => () => controller.stop(), [controller]);
+  useEffect(
+    () => () => {
+      controller.stop();
+      moving.stop();
+    },
+    [controller, moving],
+  );
 
   const [shownLetter, setShownLetter] = useState(letter);
   if (shownLetter !== letter) {
@@ -121,29 +155,38 @@ export function useView(
     if (camera?.kind === 'letter') setHand(handOf(camera));
   }
 
+  /** Moves the sheet, frame by frame, without a new page for each. */
+  function moveTo(next: Hand) {
+    moving.move(next);
+    show(next, false);
+  }
+
   return {
     controller,
     cut,
     narrow,
     hand,
     lensBox: camera?.kind === 'lens' && size.width > 0 ? frameBox(camera, size, insetsOf(size)) : undefined,
-    zoomBy: (factor) =>
-      setHand((before) => ({ ...before, zoom: Math.min(12, Math.max(0.4, before.zoom * factor)) })),
+    zoomBy: (factor) => {
+      const hand = moving.now();
+      setHand({ ...hand, zoom: Math.min(12, Math.max(0.4, hand.zoom * factor)) });
+    },
     panBy: (dxPx, dyPx) => {
       const frame = controller.frame();
       if (!frame) return;
       const mm = (2 * frame.halfHeightMm) / Math.max(1, controller.viewport().height);
-      setHand((before) => ({
-        ...before,
-        panMm: [before.panMm[0] - dxPx * mm, before.panMm[1] + dyPx * mm],
-      }));
+      const hand = moving.now();
+      const [across, up] = hand.panMm;
+      moveTo({ ...hand, panMm: [across - dxPx * mm, up + dyPx * mm] });
     },
-    turnBy: (azimuth, elevation) =>
-      setHand((before) => ({
-        ...before,
-        azimuth: before.azimuth + azimuth,
-        elevation: Math.min(1.45, Math.max(0.05, before.elevation + elevation)),
-      })),
-    fit: () => setHand((before) => ({ ...before, zoom: 1, panMm: [0, 0] })),
+    turnBy: (azimuth, elevation) => {
+      const hand = moving.now();
+      moveTo({
+        ...hand,
+        azimuth: hand.azimuth + azimuth,
+        elevation: Math.min(1.45, Math.max(0.05, hand.elevation + elevation)),
+      });
+    },
+    fit: () => setHand({ ...moving.now(), zoom: 1, panMm: [0, 0] }),
   };
 }

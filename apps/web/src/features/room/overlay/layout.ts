@@ -1,5 +1,6 @@
 import type { Vec3 } from '@settlewright/geometry';
 import { project, type ScreenPoint, type ViewFrame, type Viewport } from '../scene/view-frame.ts';
+import { boxAt, meet, type Box } from './box.ts';
 
 /** Labels are laid out in CSS pixels over the picture; sizes are those of the rendered elements. */
 export interface NameToPlace {
@@ -33,13 +34,6 @@ export interface PlacedFlag {
   to: ScreenPoint;
   /** Where a leader starts when the flag had to leave its line. */
   leader?: { x: number; y: number };
-}
-
-interface Box {
-  left: number;
-  right: number;
-  top: number;
-  bottom: number;
 }
 
 /** Something round that a flag had better not cover: a part of a body. */
@@ -122,15 +116,8 @@ export function placeNamesAtHeads(
   });
 }
 
-const boxAt = (x: number, y: number, width: number, height: number): Box => ({
-  left: x - width / 2,
-  right: x + width / 2,
-  top: y - height / 2,
-  bottom: y + height / 2,
-});
-
-const meet = (a: Box, b: Box, gap = 4): boolean =>
-  a.left < b.right + gap && b.left < a.right + gap && a.top < b.bottom + gap && b.top < a.bottom + gap;
+/** Flags and names stand so far apart, CSS pixels. */
+const APART = 4;
 
 const ALONG = [0.5, 0.36, 0.64, 0.22, 0.78];
 const ASIDE = [26, -26, 48, -48, 72, -72, 100, -100, 136, -136];
@@ -187,7 +174,7 @@ export function placeFlags(
         box.right <= viewport.width - EDGE &&
         box.top >= EDGE &&
         box.bottom <= viewport.height - EDGE;
-      return inside && ![...taken, ...avoid].some((other) => meet(box, other));
+      return inside && ![...taken, ...avoid].some((other) => meet(box, other, APART));
     };
     const on = (t: number) => ({ x: from.x + (to.x - from.x) * t, y: from.y + (to.y - from.y) * t });
     const middle = on(0.5);

@@ -1,11 +1,13 @@
 import { formatLength, type LengthStyle, type TapeLine } from '@settlewright/geometry';
-import { useCallback, useEffect, useLayoutEffect, useRef } from 'react';
+import { useCallback, useEffect, useLayoutEffect, useRef, useState } from 'react';
 import { classNames } from '@/components/class-names.ts';
 import { Measure } from '@/components/measure.tsx';
 import type { SeatedBody } from '../picture.ts';
 import { useSurroundings } from '../room-context.tsx';
 import type { ViewController } from '../scene/view-controller.ts';
 import { mix } from '../scene/vectors.ts';
+import { boxAt, type LabelBoxes } from './box.ts';
+import { createLabelLayer } from './label-layer.ts';
 import { isEndOn, placeFlags, placeNames, placeNamesAtHeads, tapePath, type Blob } from './layout.ts';
 import { TapeFlag } from './tape-flag.tsx';
 import { tapeTone } from './tape-words.ts';
@@ -13,6 +15,8 @@ import { shortName } from '@/lib/short-name.ts';
 
 interface Props {
   controller: ViewController;
+  /** Is told where names and flags stand. */
+  labels: LabelBoxes;
   /** From above there is no room over the heads: each name stands at its own. */
   namesAtHeads: boolean;
   bodies: readonly SeatedBody[];
@@ -35,22 +39,21 @@ const LINE_TONES = {
 
 /** Names and tapes over the picture, in screen pixels. React makes them; the view moves them. */
 export function Overlay(props: Props) {
-  const { controller, namesAtHeads, bodies, tapes, style, litCellId, onSelectPiece } = props;
+  const { controller, labels, namesAtHeads, bodies, tapes, style, litCellId, onSelectPiece } = props;
   // Whoever sees verdicts alone reads no heights either, though the body is drawn.
   const { detail } = useSurroundings();
-  const layer = useRef<HTMLDivElement>(null);
+  const root = useRef<HTMLDivElement>(null);
+  const [layer] = useState(createLabelLayer);
   const someLit = tapes.some((tape) => tape.cellId !== undefined && tape.cellId === litCellId);
 
   const layOut = useCallback(() => {
     const frame = controller.frame();
-    const root = layer.current;
-    if (!frame || !root) return;
+    if (!frame) return;
     const viewport = controller.viewport();
-    const find = <E extends Element>(kind: string, id: string) =>
-      root.querySelector<E>(`[data-${kind}="${CSS.escape(id)}"]`);
-    const sized = (kind: string, id: string) => {
-      const element = find<HTMLElement>(kind, id);
-      return { width: element?.offsetWidth ?? 0, height: element?.offsetHeight ?? 0 };
+    const { find, sizeOf } = layer;
+    const boxOf = (kind: string, { id, x, y }: { id: string; x: number; y: number }) => {
+      const { width, height } = sizeOf(kind, id);
+      return boxAt(x, y, width, height);
     };
     const headsMm = bodies.map((body) => body.crownMm);
     const names = (namesAtHeads ? placeNamesAtHeads : placeNames)(
@@ -59,7 +62,7 @@ export function Overlay(props: Props) {
       bodies.map((body) => ({
         id: body.placeId,
         headMm: body.crownMm,
-        ...sized('name', body.placeId),
+        ...sizeOf('name', body.placeId),
       })),
     );
     const visible = new Set(names.map((name) => name.id));
@@ -93,7 +96,7 @@ export function Overlay(props: Props) {
         id: tape.id,
         fromMm: tape.fromMm,
         toMm: tape.toMm,
-        ...sized('flag', tape.id),
+        ...sizeOf('flag', tape.id),
       })),
       headsMm,
       names,
@@ -113,17 +116,22 @@ export function Overlay(props: Props) {
         : '';
       find<SVGPathElement>('tape-leader', flag.id)?.setAttribute('d', leader);
     }
-  }, [controller, namesAtHeads, bodies, tapes, style]);
+    labels.tell([...names.map((name) => boxOf('name', name)), ...placed.map((flag) => boxOf('flag', flag))]);
+  }, [controller, layer, labels, namesAtHeads, bodies, tapes, style]);
+  const layOutAnew = useCallback(() => {
+    layer.renew(root.current);
+    layOut();
+  }, [layer, layOut]);
 
-  useLayoutEffect(layOut);
+  useLayoutEffect(layOutAnew);
   useEffect(() => controller.subscribe(layOut), [controller, layOut]);
   useEffect(() => {
     // The first layout may have measured words in the fallback font.
-    void document.fonts?.ready.then(layOut);
-  }, [layOut]);
+    void document.fonts?.ready.then(layOutAnew);
+  }, [layOutAnew]);
 
   return (
-    <div ref={layer} data-overlay className="pointer-events-none absolute inset-0 overflow-hidden">
+    <div ref={root} data-overlay className="pointer-events-none absolute inset-0 overflow-hidden">
       <svg className="tape absolute inset-0 size-full" aria-hidden="true" fill="none">
         {bodies.map((body) => (
           <path key={body.placeId} data-leader={body.placeId} className="stroke-ink-2" strokeWidth="0.9" />
@@ -176,7 +184,7 @@ export function Overlay(props: Props) {
             someLit && tape.cellId !== litCellId && 'opacity-50',
           )}
         >
-          <TapeFlag {...props} tape={tape} onLayout={layOut} />
+          <TapeFlag {...props} tape={tape} onLayout={layOutAnew} />
         </div>
       ))}
     </div>

@@ -26,8 +26,9 @@ function geometryOf(mesh: MannequinMesh): BufferGeometry {
 }
 
 function seamsOf({ positions, seams }: MannequinMesh) {
-  const ends = Array.from(seams, (vertex) => [...positions.slice(vertex * 3, vertex * 3 + 3)]);
-  return linesOf(ends.flat(), new Array<number>(seams.length / 2).fill(SEAM_WEIGHT));
+  const ends = new Float32Array(seams.length * 3);
+  seams.forEach((vertex, n) => ends.set(positions.subarray(vertex * 3, vertex * 3 + 3), n * 3));
+  return linesOf(ends, new Float32Array(seams.length / 2).fill(SEAM_WEIGHT));
 }
 
 interface FigureProps {

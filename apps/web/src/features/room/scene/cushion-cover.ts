@@ -2,7 +2,7 @@ import type { Vec3 } from '@settlewright/geometry';
 import { leanedInBy } from './back-print.ts';
 import { pressedBy, type SeatPrint } from './seat-print.ts';
 import type { SoftPart } from './soft-part.ts';
-import type { SolidSink } from './solid-arrays.ts';
+import { addEdge, addPoint, type SolidSink } from './solid-arrays.ts';
 import { add, cross, dot, normalise, scale, subtract } from './vectors.ts';
 
 /** Edge of the cover, its crown over the panel and the width over which the crown rises, mm. */
@@ -43,38 +43,40 @@ export function placerOf({ centre, across, outward, down }: SoftPart) {
   ];
 }
 
-/** Corners of the two triangles between two lines of a sheet: how far down and across. */
-const CORNERS = [0, 0, 1, 0, 1, 1, 0, 0, 1, 1, 0, 1] as const;
+/** Points of a stretch of cover that stand in a sink: line by line, from the first of them. */
+export interface Grid {
+  first: number;
+  rows: number;
+  width: number;
+}
 
 /**
- * Made anew for each frame of a pull: plain loops, as lists and spreads cost ten times as much. Its outline is drawn round
- * the edges alone: inside them a panel is never seen against anything but itself.
+ * Triangles on the points of a stretch of cover. Its outline is drawn round the edges alone: inside them a panel is never
+ * seen against anything but itself.
  */
-export function addSheet(out: SolidSink, sheet: Sheet, normals: Sheet, material: number) {
-  const { positions, normals: facing, materials, roundPositions, roundNormals } = out;
-  for (let row = 0; row + 1 < sheet.length; row++) {
-    const width = sheet[row]!.length;
+export function addGrid({ indices, roundIndices }: SolidSink, { first, rows, width }: Grid) {
+  for (let row = 0; row + 1 < rows; row++) {
     for (let column = 0; column + 1 < width; column++) {
-      const border = Math.min(row, column, sheet.length - 2 - row, width - 2 - column) < ROUNDING.length;
-      for (let n = 0; n < CORNERS.length; n += 2) {
-        const [r, c] = [row + CORNERS[n]!, column + CORNERS[n + 1]!];
-        const [at, normal] = [sheet[r]![c]!, normals[r]![c]!];
-        positions.push(at[0], at[1], at[2]);
-        facing.push(normal[0], normal[1], normal[2]);
-        materials.push(material);
-        if (!border) continue;
-        roundPositions.push(at[0], at[1], at[2]);
-        roundNormals.push(normal[0], normal[1], normal[2]);
-      }
+      const at = first + row * width + column;
+      indices.push3(at, at + width, at + width + 1);
+      indices.push3(at, at + width + 1, at + 1);
+      if (Math.min(row, column, rows - 2 - row, width - 2 - column) >= ROUNDING.length) continue;
+      roundIndices.push3(at, at + width, at + width + 1);
+      roundIndices.push3(at, at + width + 1, at + 1);
     }
   }
 }
 
+export function addSheet(out: SolidSink, sheet: Sheet, normals: Sheet, material: number) {
+  const grid: Grid = { first: out.materials.length, rows: sheet.length, width: sheet[0]!.length };
+  sheet.forEach((points, row) =>
+    points.forEach((point, column) => addPoint(out, point, normals[row]![column]!, material)),
+  );
+  addGrid(out, grid);
+}
+
 function addLoop(out: SolidSink, loop: readonly Vec3[], weight: number) {
-  loop.slice(1).forEach((point, n) => {
-    out.edges.push(...loop[n]!, ...point);
-    out.edgeWeights.push(weight);
-  });
+  for (let n = 1; n < loop.length; n++) addEdge(out, loop[n - 1]!, loop[n]!, weight);
 }
 
 /** The boxing below the rim of a panel, a closed line, with its welts. Seen from outside the rim runs clockwise. */

@@ -9,9 +9,8 @@ import {
 import { describe, expect, it } from 'vitest';
 import { addCushion } from './cushion-solid.ts';
 import type { SeatPrint } from './seat-print.ts';
-import type { SolidArrays } from './solid-arrays.ts';
+import { createSink } from './solid-arrays.ts';
 import { softPart, type SoftPart } from './soft-part.ts';
-import { mergeParts } from './solids.ts';
 import { add, cross, dot, scale, subtract } from './vectors.ts';
 
 const bench = ARRANGEMENTS.find(({ id }) => id === 'banquette')!.build();
@@ -37,7 +36,6 @@ const seat = softOf(bench, 'seat');
 const back = softOf(bench, 'back');
 const pad = softOf(curvedBench, 'back');
 const topMm = seat.centre[1] + seat.thickMm / 2;
-const empty = () => mergeParts([]);
 
 /** Somebody in the middle of the cushion, thighs along it, 30 mm into it. */
 const print: SeatPrint = {
@@ -65,21 +63,29 @@ const leaning = (soft: SoftPart): SeatPrint => ({
   ],
 });
 
-function drawn(soft: SoftPart, prints: readonly SeatPrint[] = []) {
-  const out = empty();
+/** Corners of the triangles of a cushion, three numbers each, and which way each looks. */
+interface Drawn {
+  positions: number[];
+  normals: number[];
+}
+
+function drawn(soft: SoftPart, prints: readonly SeatPrint[] = []): Drawn {
+  const out = createSink();
   addCushion(out, soft, 2, prints);
-  return out;
+  const cornersOf = (list: 'positions' | 'normals') =>
+    [...out.indices.packed()].flatMap((n) => [...out[list].memory.subarray(n * 3, n * 3 + 3)]);
+  return { positions: cornersOf('positions'), normals: cornersOf('normals') };
 }
 
 /** Points of a drawn cushion from its middle: across, outwards, down. */
-const from = (soft: SoftPart, { positions }: SolidArrays) =>
+const from = (soft: SoftPart, { positions }: Drawn) =>
   positions.flatMap((x, n) => {
     if (n % 3 !== 0) return [];
     const gap = subtract([x, positions[n + 1]!, positions[n + 2]!], soft.centre);
     return [[dot(gap, soft.across), dot(gap, soft.outward), dot(gap, soft.down)] as const];
   });
 /** Points of the panel near one of its own. */
-const panelAt = (soft: SoftPart, out: SolidArrays, across: number, down: number) =>
+const panelAt = (soft: SoftPart, out: Drawn, across: number, down: number) =>
   from(soft, out)
     .filter(([u, , v]) => Math.abs(u - across) < 40 && Math.abs(v - down) < 40)
     .map(([, outward]) => outward);
@@ -144,7 +150,7 @@ describe('a cushion', () => {
 
   it('goes down under a sitter by the sink of that sitter, and nowhere far from there', () => {
     const pressed = drawn(seat, [print]);
-    const near = (out: SolidArrays, x: number) =>
+    const near = (out: Drawn, x: number) =>
       out.positions.flatMap((value, n) =>
         n % 3 === 0 &&
         Math.abs(value - x) < 40 &&
@@ -182,7 +188,7 @@ describe('a cushion', () => {
   it('of a plan of its own goes down under a sitter, and leaves its notch free', () => {
     const out = drawn(notched, [print]);
     const plain = drawn(notched);
-    const under = (of: SolidArrays) =>
+    const under = (of: Drawn) =>
       Math.min(...panelAt(notched, of, 0, 0).filter((w) => w > -notched.thickMm / 2 + 1));
     expect(under(plain) - under(out)).toBeCloseTo(30, -0.5);
     const taken = softOf(bench, 'seat');

@@ -1,6 +1,7 @@
 import type { Vec3 } from '@settlewright/geometry';
 import {
   addBoxing,
+  addGrid,
   addSheet,
   LEAST_MM,
   placerOf,
@@ -8,13 +9,13 @@ import {
   ROUNDING,
   roundOf,
   sagAt,
-  type Sheet,
+  type Grid,
 } from './cushion-cover.ts';
 import { addOutlinedCushion } from './outlined-cushion.ts';
 import type { SeatPrint } from './seat-print.ts';
 import type { SoftPart } from './soft-part.ts';
 import type { SolidSink } from './solid-arrays.ts';
-import { normalise, scale } from './vectors.ts';
+import { scale } from './vectors.ts';
 
 /** Distances of the lines of a panel: close where somebody sits or leans on it and down a curve, mm. */
 const PRESSED_STEP_MM = 56;
@@ -32,29 +33,46 @@ function lines(half: number, round: number, step: number): number[] {
   return [...outer.map((at) => -at), ...between, ...outer].sort((a, b) => a - b);
 }
 
-/** Normal of each point of a sheet, from the points next to it. */
-function normalsOf(sheet: Sheet): Sheet {
-  return sheet.map((points, row) => {
-    const before = sheet[row - 1] ?? points;
-    const after = sheet[row + 1] ?? points;
-    return points.map((point, column) => {
-      const [left, right] = [points[column - 1] ?? point, points[column + 1] ?? point];
-      const [over, under] = [before[column] ?? point, after[column] ?? point];
-      const [ax, ay, az] = [under[0] - over[0], under[1] - over[1], under[2] - over[2]];
-      const [bx, by, bz] = [right[0] - left[0], right[1] - left[1], right[2] - left[2]];
-      return normalise([ay * bz - az * by, az * bx - ax * bz, ax * by - ay * bx]);
-    });
-  });
+/** Writes the normal of each point of a grid, from the points next to it. */
+function addNormals({ positions, normals }: SolidSink, { first, rows, width }: Grid) {
+  const at = normals.take(rows * width * 3);
+  const [points, facing] = [positions.memory, normals.memory];
+  for (let row = 0; row < rows; row++) {
+    const over = first + Math.max(0, row - 1) * width;
+    const under = first + Math.min(rows - 1, row + 1) * width;
+    for (let column = 0; column < width; column++) {
+      const line = first + row * width;
+      const left = 3 * (line + Math.max(0, column - 1));
+      const right = 3 * (line + Math.min(width - 1, column + 1));
+      const [high, low] = [3 * (over + column), 3 * (under + column)];
+      const ax = points[low]! - points[high]!;
+      const ay = points[low + 1]! - points[high + 1]!;
+      const az = points[low + 2]! - points[high + 2]!;
+      const bx = points[right]! - points[left]!;
+      const by = points[right + 1]! - points[left + 1]!;
+      const bz = points[right + 2]! - points[left + 2]!;
+      const [x, y, z] = [ay * bz - az * by, az * bx - ax * bz, ax * by - ay * bx];
+      const length = Math.sqrt(x * x + y * y + z * z) || 1;
+      const to = at + 3 * (row * width + column);
+      facing[to] = x / length;
+      facing[to + 1] = y / length;
+      facing[to + 2] = z / length;
+    }
+  }
 }
 
 /** Points round the rim of a panel, closed. */
-function rimOf(panel: Sheet): Vec3[] {
-  const first = panel[0] ?? [];
-  const last = panel.at(-1) ?? [];
-  const right = panel.slice(1, -1).map((row) => row.at(-1)!);
-  const left = panel.slice(1, -1).map((row) => row[0]!);
-  const round = [...first, ...right, ...[...last].reverse(), ...left.reverse()];
-  return [...round, round[0]!];
+function rimOf({ positions }: SolidSink, { first, rows, width }: Grid): Vec3[] {
+  const point = (row: number, column: number): Vec3 => {
+    const at = 3 * (first + row * width + column);
+    return [positions.memory[at]!, positions.memory[at + 1]!, positions.memory[at + 2]!];
+  };
+  const round: Vec3[] = [];
+  for (let column = 0; column < width; column++) round.push(point(0, column));
+  for (let row = 1; row < rows; row++) round.push(point(row, width - 1));
+  for (let column = width - 2; column >= 0; column--) round.push(point(rows - 1, column));
+  for (let row = rows - 2; row >= 0; row--) round.push(point(row, 0));
+  return round;
 }
 
 /** Distances of the lines across and down a panel. */
@@ -80,26 +98,28 @@ export function addCushion(out: SolidSink, soft: SoftPart, material: number, pri
   const place = placerOf(soft);
 
   const columns = lines(a, round, stepAcross);
-  const panel: Sheet = lines(b, round, stepDown).map((v) =>
-    columns.map((u) => {
-      const [eu, ev] = [
-        Math.max(0, Math.abs(u) - a + round) / round,
-        Math.max(0, Math.abs(v) - b + round) / round,
-      ];
-      const [du, dv] = [eu * Math.sqrt(1 - (ev * ev) / 2), ev * Math.sqrt(1 - (eu * eu) / 2)];
+  const rows = lines(b, round, stepDown);
+  const grid: Grid = { first: out.materials.length, rows: rows.length, width: columns.length };
+  for (const v of rows) {
+    for (const u of columns) {
+      const eu = Math.max(0, Math.abs(u) - a + round) / round;
+      const ev = Math.max(0, Math.abs(v) - b + round) / round;
+      const du = eu * Math.sqrt(1 - (ev * ev) / 2);
+      const dv = ev * Math.sqrt(1 - (eu * eu) / 2);
       const sag = sagAt(thick, Math.min(a - Math.abs(u), b - Math.abs(v)));
       const rise = round * Math.sqrt(Math.max(0, 1 - du * du - dv * dv));
-      const at: readonly [number, number] = [
-        eu > 0 ? Math.sign(u) * (a - round + round * du) : u,
-        ev > 0 ? Math.sign(v) * (b - round + round * dv) : v,
-      ];
-      const top = thick / 2 - round + rise - sag - (hollowAt?.(at[1]) ?? 0);
-      return place(at[0], Math.max(LEAST_MM - thick / 2, top - press(place(at[0], top, at[1]))), at[1]);
-    }),
-  );
-  addSheet(out, panel, normalsOf(panel), material);
+      const across = eu > 0 ? Math.sign(u) * (a - round + round * du) : u;
+      const down = ev > 0 ? Math.sign(v) * (b - round + round * dv) : v;
+      const top = thick / 2 - round + rise - sag - (hollowAt?.(down) ?? 0);
+      const at = place(across, Math.max(LEAST_MM - thick / 2, top - press(place(across, top, down))), down);
+      out.positions.push3(at[0], at[1], at[2]);
+      out.materials.push(material);
+    }
+  }
+  addNormals(out, grid);
+  addGrid(out, grid);
 
-  const foot = addBoxing(out, soft, rimOf(panel), material);
+  const foot = addBoxing(out, soft, rimOf(out, grid), material);
   const under = foot.map(() => place(0, -thick / 2, 0));
   const away = foot.map(() => scale(outward, -1));
   addSheet(out, [under, foot], [away, away], material);

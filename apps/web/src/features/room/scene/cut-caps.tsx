@@ -51,8 +51,13 @@ export function CutCaps({ picture, letter, cut, materials }: Props) {
     const parts = visibleParts(picture.document, picture.parts, letter);
     const { positions, normals, tones, edges } = filled(roomCutFaces(parts, cut.pointMm, cut.toward), cut);
     return {
-      faces: surfaceOf(positions, normals, tones),
-      edges: linesOf(edges, new Array<number>(edges.length / 6).fill(1)),
+      faces: surfaceOf({
+        positions: new Float32Array(positions),
+        normals: new Float32Array(normals),
+        materials: new Float32Array(tones),
+        grains: new Float32Array(tones.length * 4),
+      }),
+      edges: linesOf(new Float32Array(edges), new Float32Array(edges.length / 6).fill(1)),
     };
   }, [picture, letter, cut]);
   useDispose(made);

@@ -12,7 +12,7 @@ import {
 } from './cushion-cover.ts';
 import type { SeatPrint } from './seat-print.ts';
 import type { SoftPart } from './soft-part.ts';
-import type { SolidSink } from './solid-arrays.ts';
+import { addPoint, type SolidSink } from './solid-arrays.ts';
 import { between, crossings, holds, inset, strips, withinMm, type Point } from './panel-outline.ts';
 import { add, normalise, scale } from './vectors.ts';
 
@@ -111,11 +111,9 @@ function addTriangles(
 ) {
   // The filler takes outlines either way round and gives them back anticlockwise in its own plane: mirrored here, so clockwise.
   const flat = outline.map(([u, v]) => new Vector2(u, -v));
-  for (const triangle of ShapeUtils.triangulateShape(flat, [])) {
-    for (const n of fromBelow ? [...triangle].reverse() : triangle) {
-      out.positions.push(...corners[n]!);
-      out.normals.push(...normals[n]!);
-      out.materials.push(material);
-    }
+  const points = outline.map((_, n) => addPoint(out, corners[n]!, normals[n]!, material));
+  for (const [a, b, c] of ShapeUtils.triangulateShape(flat, []) as [number, number, number][]) {
+    const [first, last] = fromBelow ? [c, a] : [a, c];
+    out.indices.push3(points[first]!, points[b]!, points[last]!);
   }
 }

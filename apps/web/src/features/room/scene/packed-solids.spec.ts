@@ -40,7 +40,7 @@ describe('solids of pieces', () => {
     for (const [list, numbers] of Object.entries(merged)) {
       const packed = joined[list as keyof typeof joined];
       expect(packed.length).toBe(numbers.length);
-      const off = numbers.map((value: number, n: number) => Math.abs(value - packed[n]!));
+      const off = Array.from(numbers, (value, n) => Math.abs(value - packed[n]!));
       expect(Math.max(0, ...off)).toBeLessThan(0.01);
     }
   });

@@ -1,17 +1,10 @@
 import type { Part } from '@settlewright/geometry';
-import { Floats } from './floats';
 import type { SeatPrint } from './seat-print';
-import { eachSolidList, SOLID_LISTS, type SolidArrays } from './solid-arrays';
+import { createSink, listsOf, packSink, type PackedSolids } from './solid-arrays';
 import { addParts } from './solids';
 
-/** Triangles and edges of a piece as they go to the card. */
-export type PackedSolids = Record<keyof SolidArrays, Float32Array>;
-
 /** Where solids are made; emptied for the next piece. */
-const workbench = eachSolidList(() => new Floats());
-
-const eachList = (of: (list: keyof SolidArrays) => Float32Array): PackedSolids =>
-  Object.fromEntries(SOLID_LISTS.map((list) => [list, of(list)])) as PackedSolids;
+const workbench = createSink();
 
 const kept = new WeakMap<readonly Part[], { prints: readonly SeatPrint[]; made: PackedSolids }>();
 
@@ -24,24 +17,49 @@ export function solidsOf(parts: readonly Part[], prints: readonly SeatPrint[] = 
   if (known?.prints.length === prints.length && prints.every((print, n) => print === known.prints[n])) {
     return known.made;
   }
-  for (const list of SOLID_LISTS) workbench[list].clear();
+  for (const list of listsOf(workbench)) list.clear();
   addParts(workbench, parts, () => prints);
-  const made = eachList((list) => workbench[list].slice(0));
+  const made = packSink(workbench);
   kept.set(parts, { prints, made });
   return made;
 }
+
+type Floating = Exclude<keyof PackedSolids, 'indices' | 'roundIndices'>;
 
 /** The solids of several pieces in one. */
 export function joinSolids(pieces: readonly PackedSolids[]): PackedSolids {
   const [only] = pieces;
   if (only && pieces.length === 1) return only;
-  return eachList((list) => {
-    const joined = new Float32Array(pieces.reduce((length, piece) => length + piece[list].length, 0));
+  const count = (list: keyof PackedSolids) =>
+    pieces.reduce((length, piece) => length + piece[list].length, 0);
+  const joined = (list: Floating) => {
+    const all = new Float32Array(count(list));
     let start = 0;
     for (const piece of pieces) {
-      joined.set(piece[list], start);
+      all.set(piece[list], start);
       start += piece[list].length;
     }
-    return joined;
-  });
+    return all;
+  };
+  /** Points of a piece are numbered on from those of the pieces before it. */
+  const numbered = (list: 'indices' | 'roundIndices') => {
+    const all = new Uint32Array(count(list));
+    let [start, first] = [0, 0];
+    for (const { [list]: own, materials } of pieces) {
+      for (let n = 0; n < own.length; n++) all[start + n] = own[n]! + first;
+      start += own.length;
+      first += materials.length;
+    }
+    return all;
+  };
+  return {
+    positions: joined('positions'),
+    normals: joined('normals'),
+    materials: joined('materials'),
+    grains: joined('grains'),
+    indices: numbered('indices'),
+    roundIndices: numbered('roundIndices'),
+    edges: joined('edges'),
+    edgeWeights: joined('edgeWeights'),
+  };
 }

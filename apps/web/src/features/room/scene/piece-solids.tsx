@@ -2,11 +2,12 @@ import { derivePieceParts, type Piece } from '@settlewright/geometry';
 import { memo, useMemo } from 'react';
 import type { Carried, DrawnPicture } from '../drawn-picture';
 import { linesOf } from './ink-lines';
-import { joinSolids, solidsOf, type PackedSolids } from './packed-solids';
+import { joinSolids, solidsOf } from './packed-solids';
 import { ReshapedSolids } from './reshaped-solids';
 import { printsByPiece } from './seat-print';
 import type { SceneMaterials } from './shaders';
-import { surfaceOf } from './solids';
+import type { PackedSolids } from './solid-arrays';
+import { someOf, surfaceOf } from './solids';
 import { useDispose } from './use-dispose';
 import { visiblePieces } from './visible-parts';
 import type { SceneView } from './views';
@@ -29,15 +30,15 @@ const Solids = memo(
   function Solids({ pieces, letter, chosen, materials }: SolidsProps) {
     const made = useMemo(() => {
       const all = joinSolids(pieces);
+      const surface = surfaceOf(all);
       return {
-        surface: surfaceOf(all.positions, all.normals, all.materials, all.grains),
+        surface,
         edges: linesOf(all.edges, all.edgeWeights),
-        ...(all.roundPositions.length > 0 && { rounds: surfaceOf(all.roundPositions, all.roundNormals) }),
-        ...(chosen && { outline: linesOf(all.edges, new Float32Array(all.edgeWeights.length).fill(1)) }),
+        ...(all.roundIndices.length > 0 && { rounds: someOf(surface, all.roundIndices) }),
       };
-    }, [pieces, chosen]);
+    }, [pieces]);
     useDispose(made);
-    const { surface, edges, rounds, outline } = made;
+    const { surface, edges, rounds } = made;
     const look = chosen ? materials.chosenSurface : materials.surface;
     return (
       <>
@@ -47,8 +48,8 @@ const Solids = memo(
         <mesh geometry={surface} material={look} frustumCulled={false} />
         {rounds && <mesh geometry={rounds} material={materials.hull} frustumCulled={false} />}
         <mesh geometry={edges} material={materials.edges} renderOrder={2} frustumCulled={false} />
-        {outline && (
-          <mesh geometry={outline} material={materials.outline} renderOrder={3} frustumCulled={false} />
+        {chosen && (
+          <mesh geometry={edges} material={materials.outline} renderOrder={3} frustumCulled={false} />
         )}
       </>
     );

@@ -2,7 +2,9 @@ import { Canvas, useFrame, useThree } from '@react-three/fiber';
 import { lazy, Suspense, useEffect, useLayoutEffect, useMemo, useRef } from 'react';
 import { OrthographicCamera } from 'three';
 import { offerStill, type Taker } from '../export/still';
-import type { DrawnPicture } from '../drawn-picture';
+import { drawnPicture, type DrawnPicture } from '../drawn-picture';
+import type { RoomPicture } from '../picture';
+import { useRoom } from '../store';
 import { BodyFigures } from './body-figures';
 import { CutCaps } from './cut-caps';
 import { followView } from './follow-view';
@@ -19,8 +21,10 @@ const GhostFigures = lazy(() => import('../bodies/ghost-figures'));
 
 const METRES = 0.001;
 
-export interface SceneProps {
-  picture: DrawnPicture;
+interface SceneProps {
+  picture: RoomPicture;
+  /** What is in the hand is drawn as the hand has it, frame by frame. */
+  following?: boolean;
   controller: ViewController;
   letter: SceneView;
   cut: Cut | undefined;
@@ -69,8 +73,17 @@ function aim(camera: OrthographicCamera, frame: ViewFrame, aspect: number) {
   camera.projectionMatrixInverse.copy(camera.projectionMatrix).invert();
 }
 
+/** Follows the hand in here alone: nothing of the page round the drawing is made anew for a frame. */
+function FollowingStage(props: SceneProps) {
+  const { picture } = props;
+  const moving = useRoom((state) => state.moving);
+  const drawn = useMemo(() => (moving ? drawnPicture(moving, picture) : picture), [moving, picture]);
+  return <Stage {...props} drawn={drawn} />;
+}
+
 function Stage({
   picture,
+  drawn,
   controller,
   letter,
   cut,
@@ -81,9 +94,9 @@ function Stage({
   report,
   offer = offerStill,
   forPaper = false,
-}: SceneProps) {
+}: SceneProps & { drawn: DrawnPicture }) {
   // Doubt is drawn round those who stand where they were counted.
-  const standing = picture.bodies.filter(({ pieceId }) => !picture.carried?.before.has(pieceId));
+  const standing = drawn.bodies.filter(({ pieceId }) => !drawn.carried?.before.has(pieceId));
   const camera = useMemo(() => new OrthographicCamera(), []);
   const shared = useMemo(() => createSharedUniforms(), []);
   const materials = useMemo(() => createMaterials(shared), [shared]);
@@ -123,7 +136,7 @@ function Stage({
       }),
     [advance, canvas, offer],
   );
-  useEffect(() => invalidate(), [picture, letter, chosenIds, showBodies, showDoubt, invalidate]);
+  useEffect(() => invalidate(), [drawn, letter, chosenIds, showBodies, showDoubt, invalidate]);
   useEffect(
     () => () => Object.values(materials).forEach((item) => 'dispose' in item && item.dispose()),
     [materials],
@@ -150,16 +163,14 @@ function Stage({
     <group scale={METRES}>
       <Ground picture={picture} letter={letter} materials={materials} />
       <PieceSolids
-        picture={picture}
+        picture={drawn}
         letter={letter}
         chosenIds={chosenIds}
         showBodies={showBodies}
         materials={materials}
       />
-      {cut && <CutCaps picture={picture} letter={letter} cut={cut} materials={materials} />}
-      {showBodies && (
-        <BodyFigures picture={picture} palette={palette} shared={shared} materials={materials} />
-      )}
+      {cut && <CutCaps picture={drawn} letter={letter} cut={cut} materials={materials} />}
+      {showBodies && <BodyFigures picture={drawn} palette={palette} shared={shared} materials={materials} />}
       {showBodies && showDoubt && (
         <Suspense fallback={null}>
           <GhostFigures bodies={standing} palette={palette} shared={shared} />
@@ -181,7 +192,7 @@ export default function SceneCanvas(props: SceneProps) {
       aria-hidden="true"
       tabIndex={-1}
     >
-      <Stage {...props} />
+      {props.following ? <FollowingStage {...props} /> : <Stage {...props} drawn={props.picture} />}
     </Canvas>
   );
 }

@@ -74,7 +74,12 @@ const LINE_VERTEX = /* glsl */ `
     float len = length(run);
     vec2 along = len > 1e-4 ? run / len : vec2(1.0, 0.0);
     vec2 across = vec2(-along.y, along.x);
-    float width = uWidth * (lineWeight < 1.0 ? 0.75 : 1.0);
+    #ifdef ALL_ALIKE
+      float weight = 1.0;
+    #else
+      float weight = lineWeight;
+    #endif
+    float width = uWidth * (weight < 1.0 ? 0.75 : 1.0);
     vec4 at = position.y < 0.5 ? a : b;
     vec2 offset = across * position.x + along * (position.y * 2.0 - 1.0) * 0.8;
     at.xy += offset * width / uSize * at.w;
@@ -82,7 +87,7 @@ const LINE_VERTEX = /* glsl */ `
     vec4 nearer = projectionMatrix * (seen + vec4(0.0, 0.0, ${LINE_NEARER_M}, 0.0));
     at.z = nearer.z / nearer.w * at.w;
     vRoom = roomOf(mix(lineStart, lineEnd, position.y));
-    vWeight = lineWeight;
+    vWeight = weight;
     gl_Position = at;
   }`;
 
@@ -200,6 +205,8 @@ export function createMaterials(shared: SharedUniforms) {
     /** Twice as wide as it shows: its inner half lies on the piece itself and is left out. */
     outline: new ShaderMaterial({
       ...line(6, chosenInk),
+      // Seams between boards as well, or it would be broken where one ends at the rim.
+      defines: { ALL_ALIKE: '' },
       stencilWrite: true,
       stencilRef: CHOSEN_STENCIL,
       stencilFunc: NotEqualStencilFunc,

@@ -3,8 +3,8 @@ import { BufferAttribute, BufferGeometry, ShapeUtils, Vector2 } from 'three';
 import { addCushion } from './cushion-solid';
 import type { SeatPrint } from './seat-print';
 import { softPart } from './soft-part';
-import { eachSolidList, type SolidArrays, type SolidSink } from './solid-arrays';
-import { grainsOf, hasGrain } from './timber';
+import { addEdge, addPoint, createSink, packSink, type PackedSolids, type SolidSink } from './solid-arrays';
+import { addGrains } from './timber';
 import { add, normalise, partAxes, scale } from './vectors';
 
 /** Order of the materials in the palette of the shaders. */
@@ -22,19 +22,12 @@ function placer(part: Part): { at: Place; along: Place } {
   return { along, at: (x, y, z) => add(part.positionMm, along(x, y, z)) };
 }
 
-/** Outline of a solid in its own x-y or x-z plane, with what is needed to extrude it. */
-function addFace(out: SolidSink, corners: Vec3[], normal: Vec3, material: number) {
-  const [a, b, c, d] = corners as [Vec3, Vec3, Vec3, Vec3];
-  for (const corner of [a, b, c, a, c, d]) {
-    out.positions.push(...corner);
-    out.normals.push(...normal);
-    out.materials.push(material);
-  }
-}
-
-function addEdge(out: SolidSink, a: Vec3, b: Vec3, weight: number) {
-  out.edges.push(...a, ...b);
-  out.edgeWeights.push(weight);
+/** A flat face with four corners. */
+function addFace(out: SolidSink, corners: readonly [Vec3, Vec3, Vec3, Vec3], normal: Vec3, material: number) {
+  const first = out.materials.length;
+  for (const corner of corners) addPoint(out, corner, normal, material);
+  out.indices.push3(first, first + 1, first + 2);
+  out.indices.push3(first, first + 2, first + 3);
 }
 
 function addBox(out: SolidSink, part: Part, size: Vec3, material: number, weight: number) {
@@ -58,28 +51,24 @@ function addBox(out: SolidSink, part: Part, size: Vec3, material: number, weight
 function addCylinder(out: SolidSink, part: Part, radius: number, height: number, material: number) {
   const { at, along } = placer(part);
   const h = height / 2;
-  const start = out.positions.length;
+  const start = out.indices.length;
+  const corner = (point: Vec3, normal: Vec3) => addPoint(out, point, normal, material);
+  const [up, down] = [along(0, 1, 0), along(0, -1, 0)];
   for (let n = 0; n < ROUND_SIDES; n++) {
     const [a, b] = [(n / ROUND_SIDES) * Math.PI * 2, ((n + 1) / ROUND_SIDES) * Math.PI * 2];
     const [xa, za, xb, zb] = [Math.cos(a), Math.sin(a), Math.cos(b), Math.sin(b)];
     const [pa, pb] = [at(xa * radius, -h, za * radius), at(xb * radius, -h, zb * radius)];
     const [qa, qb] = [at(xa * radius, h, za * radius), at(xb * radius, h, zb * radius)];
     const [na, nb] = [along(xa, 0, za), along(xb, 0, zb)];
-    out.positions.push(...pa, ...qa, ...pb, ...pb, ...qa, ...qb);
-    out.normals.push(...na, ...na, ...nb, ...nb, ...na, ...nb);
-    out.positions.push(...at(0, h, 0), ...qb, ...qa, ...at(0, -h, 0), ...pa, ...pb);
-    for (const face of [along(0, 1, 0), along(0, -1, 0)]) out.normals.push(...face, ...face, ...face);
-    for (let m = 0; m < 12; m++) out.materials.push(material);
+    const [low, high, lowNext, highNext] = [corner(pa, na), corner(qa, na), corner(pb, nb), corner(qb, nb)];
+    out.indices.push3(low, high, lowNext);
+    out.indices.push3(lowNext, high, highNext);
+    out.indices.push3(corner(at(0, h, 0), up), corner(qb, up), corner(qa, up));
+    out.indices.push3(corner(at(0, -h, 0), down), corner(pa, down), corner(pb, down));
     addEdge(out, qa, qb, 1);
     addEdge(out, pa, pb, 1);
   }
-  for (const [list, again] of [
-    [out.positions, out.roundPositions],
-    [out.normals, out.roundNormals],
-  ] as const) {
-    const made = list.slice(start);
-    for (let n = 0; n < made.length; n++) again.push(made[n]!);
-  }
+  for (let n = start; n < out.indices.length; n++) out.roundIndices.push(out.indices.memory[n]!);
 }
 
 /** Sides that meet at less than this are one curved face: no ink runs between them, radians. */
@@ -93,12 +82,13 @@ function addPrism(out: SolidSink, part: Part, solid: Extract<Solid, { shape: 'pr
   const outline = solid.outlineMm;
   const z = solid.depthMm / 2;
   const flat = outline.map(([x, y]) => new Vector2(x, y));
-  for (const [a, b, c] of ShapeUtils.triangulateShape(flat, [])) {
-    const corners = [a, b, c].map((n) => outline[n ?? 0] ?? [0, 0]);
-    for (const [x, y] of corners) out.positions.push(...at(x, y, z));
-    for (const [x, y] of [...corners].reverse()) out.positions.push(...at(x, y, -z));
-    for (const face of [along(0, 0, 1), along(0, 0, -1)]) out.normals.push(...face, ...face, ...face);
-    for (let m = 0; m < 6; m++) out.materials.push(material);
+  const [over, under] = [z, -z].map((side) => {
+    const normal = along(0, 0, Math.sign(side));
+    return outline.map(([x, y]) => addPoint(out, at(x, y, side), normal, material));
+  }) as [number[], number[]];
+  for (const [a, b, c] of ShapeUtils.triangulateShape(flat, []) as [number, number, number][]) {
+    out.indices.push3(over[a]!, over[b]!, over[c]!);
+    out.indices.push3(under[c]!, under[b]!, under[a]!);
   }
   outline.forEach(([x0, y0], n) => {
     const [x1, y1] = outline[(n + 1) % outline.length] ?? [0, 0];
@@ -111,15 +101,6 @@ function addPrism(out: SolidSink, part: Part, solid: Extract<Solid, { shape: 'pr
   });
 }
 
-function addGrains({ positions, grains }: SolidSink, part: Part, start: number) {
-  if (!hasGrain(part)) {
-    for (let n = start; n < positions.length; n += 3) grains.push(0, 0, 0, 0);
-    return;
-  }
-  const made = grainsOf(part, positions.slice(start));
-  for (let n = 0; n < made.length; n++) grains.push(made[n]!);
-}
-
 /** Writes triangles and edges of parts behind those that are there. Seats are pressed in by those who sit on their piece. */
 export function addParts(
   out: SolidSink,
@@ -129,7 +110,7 @@ export function addParts(
   for (const part of parts) {
     const material = MATERIALS.indexOf(part.material);
     const weight = SEAMS[part.role] ?? 1;
-    const start = out.positions.length;
+    const start = out.materials.length;
     const soft = softPart(part);
     if (soft) addCushion(out, soft, material, printsOn(part.pieceId));
     else if (part.solid.shape === 'box') addBox(out, part, part.solid.sizeMm, material, weight);
@@ -140,34 +121,38 @@ export function addParts(
   }
 }
 
-/** Merges parts into one list of triangles and one of edges. */
+/** Triangles and edges of parts in one. */
 export function mergeParts(
   parts: readonly Part[],
   printsOn: (pieceId: string) => readonly SeatPrint[] = () => [],
-): SolidArrays {
-  const out = eachSolidList((): number[] => []);
+): PackedSolids {
+  const out = createSink();
   addParts(out, parts, printsOn);
-  return out;
+  return packSink(out);
 }
 
-type Numbers = readonly number[] | Float32Array;
-
-const packed = (numbers: Numbers): Float32Array =>
-  numbers instanceof Float32Array ? numbers : new Float32Array(numbers);
-
-/** Triangles as they go to the card; those that have a material and no grain are plain. */
-export function surfaceOf(
-  positions: Numbers,
-  normals: Numbers,
-  materials?: Numbers,
-  grains: Numbers = new Float32Array((materials?.length ?? 0) * 4),
-): BufferGeometry {
+/** Triangles as they go to the card. */
+export function surfaceOf({
+  positions,
+  normals,
+  materials,
+  grains,
+  indices,
+}: Pick<PackedSolids, 'positions' | 'normals'> & Partial<PackedSolids>): BufferGeometry {
   const geometry = new BufferGeometry();
-  geometry.setAttribute('position', new BufferAttribute(packed(positions), 3));
-  geometry.setAttribute('normal', new BufferAttribute(packed(normals), 3));
-  if (materials) {
-    geometry.setAttribute('tone', new BufferAttribute(packed(materials), 1));
-    geometry.setAttribute('grain', new BufferAttribute(packed(grains), 4));
-  }
+  geometry.setAttribute('position', new BufferAttribute(positions, 3));
+  geometry.setAttribute('normal', new BufferAttribute(normals, 3));
+  if (materials) geometry.setAttribute('tone', new BufferAttribute(materials, 1));
+  if (grains) geometry.setAttribute('grain', new BufferAttribute(grains, 4));
+  if (indices) geometry.setIndex(new BufferAttribute(indices, 1));
+  return geometry;
+}
+
+/** Some of the triangles of a surface, on the very same points. Both are freed together. */
+export function someOf(surface: BufferGeometry, indices: Uint32Array): BufferGeometry {
+  const geometry = new BufferGeometry();
+  geometry.setAttribute('position', surface.getAttribute('position'));
+  geometry.setAttribute('normal', surface.getAttribute('normal'));
+  geometry.setIndex(new BufferAttribute(indices, 1));
   return geometry;
 }

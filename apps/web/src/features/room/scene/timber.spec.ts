@@ -1,15 +1,14 @@
 import { ARRANGEMENTS, deriveParts } from '@settlewright/geometry';
 import { describe, expect, it } from 'vitest';
 import { mergeParts } from './solids.ts';
-import { grainsOf } from './timber.ts';
 
 const parts = deriveParts(ARRANGEMENTS.find(({ id }) => id === 'banquette')!.build());
 const boards = parts.filter(({ role }) => role === 'back-board');
 
 /** Grain at every corner of a part, four numbers each. */
 const grains = (part: (typeof parts)[number]) => {
-  const all = grainsOf(part, mergeParts([part]).positions);
-  return Array.from({ length: all.length / 4 }, (_, n) => all.slice(n * 4, n * 4 + 4));
+  const { grains: all } = mergeParts([part]);
+  return Array.from({ length: all.length / 4 }, (_, n) => [...all.slice(n * 4, n * 4 + 4)]);
 };
 const span = (values: number[]) => Math.max(...values) - Math.min(...values);
 

@@ -1,4 +1,5 @@
 import type { MaterialKey, Part, Vec3 } from '@settlewright/geometry';
+import type { SolidSink } from './solid-arrays.ts';
 import { dot, partAxes } from './vectors.ts';
 
 /** Materials that show a grain; walls are painted. */
@@ -19,26 +20,34 @@ function seedOf(id: string): number {
   return (((hash ^ (hash >>> 12)) >>> 0) % SEEDS) / SEEDS + 1 / SEEDS;
 }
 
-export const hasGrain = (part: Part): part is Part & { grain: NonNullable<Part['grain']> } =>
+const hasGrain = (part: Part): part is Part & { grain: NonNullable<Part['grain']> } =>
   part.grain !== undefined && TIMBERS.has(part.material);
 
 /**
- * Where points of a part lie in their board: along its grain and across it in mm, and the seed of the board; all 0
- * without a grain.
+ * Writes where the points of a part lie in their board: along its grain and across it in mm, and the seed of the board;
+ * all 0 without a grain. `first` is the first point of the part.
  */
-export function grainsOf(part: Part, positions: ArrayLike<number>): number[] {
-  if (!hasGrain(part)) return new Array<number>((positions.length / 3) * 4).fill(0);
+export function addGrains({ positions, grains }: SolidSink, part: Part, first: number): void {
+  const end = positions.length / 3;
+  const start = grains.take((end - first) * 4);
+  if (!hasGrain(part)) {
+    grains.memory.fill(0, start, grains.length);
+    return;
+  }
   const axes = partAxes(part.rotationRad);
   const order = ORDERS[part.grain];
   const seed = seedOf(part.id);
   const [x, y, z] = part.positionMm;
   const [along, across, over] = [axes[order[0]], axes[order[1]], axes[order[2]]];
-  const grains: number[] = [];
-  for (let n = 0; n < positions.length; n += 3) {
-    const from: Vec3 = [positions[n]! - x, positions[n + 1]! - y, positions[n + 2]! - z];
-    grains.push(dot(along, from), dot(across, from), dot(over, from), seed);
+  for (let n = 0; n < end - first; n++) {
+    const [from, to] = [(first + n) * 3, start + n * 4];
+    const { memory: points } = positions;
+    const away: Vec3 = [points[from]! - x, points[from + 1]! - y, points[from + 2]! - z];
+    grains.memory[to] = dot(along, away);
+    grains.memory[to + 1] = dot(across, away);
+    grains.memory[to + 2] = dot(over, away);
+    grains.memory[to + 3] = seed;
   }
-  return grains;
 }
 
 /**

@@ -3,6 +3,7 @@ import { useEffect, useRef, type PointerEvent, type RefObject } from 'react';
 import { announce } from '@/lib/announce.ts';
 import { isTaken, useSingleKeys } from '../hooks/use-shortcuts.ts';
 import type { View } from '../hooks/use-view.ts';
+import { showReadOut } from '../components/read-out.ts';
 import type { RoomPicture } from '../picture.ts';
 import { useSurroundings } from '../room-context.tsx';
 import { dot } from '../scene/vectors.ts';
@@ -69,16 +70,6 @@ export function useTapeHand(options: {
     });
   }
 
-  function say(words: string | undefined, x: number, y: number) {
-    const element = readOut.current;
-    if (!element) return;
-    element.toggleAttribute('hidden', words === undefined);
-    element.replaceChildren(words ?? '');
-    const room = (element.parentElement?.clientWidth ?? 0) - element.offsetWidth - 4;
-    const left = Math.max(4, Math.min(x + 14, room));
-    element.style.setProperty('transform', `translate(${left}px, ${Math.max(4, y - 34)}px)`);
-  }
-
   function take(end: MeasureEnd) {
     if (!first) {
       holdFirst(end);
@@ -118,7 +109,7 @@ export function useTapeHand(options: {
       const snap = under(x, y, pointerType);
       const frame = view.controller.frame();
       const point = snap && frame && project(frame, view.controller.viewport(), snap.pointMm);
-      say(snap && endWords(snap.end, scene), point?.x ?? x, point?.y ?? y);
+      showReadOut(readOut.current, snap && endWords(snap.end, scene), point?.x ?? x, point?.y ?? y);
     });
   }
 
@@ -130,13 +121,13 @@ export function useTapeHand(options: {
     const snap = under(x, y, event.pointerType);
     if (snap) take(snap.end);
     else announce('Nothing stands there.');
-    say(snap && endWords(snap.end, scene), x, y);
+    showReadOut(readOut.current, snap && endWords(snap.end, scene), x, y);
   }
 
   function leave() {
     pressed.current = null;
     cancelAnimationFrame(request.current);
-    say(undefined, 0, 0);
+    showReadOut(readOut.current, undefined, 0, 0);
   }
 
   return on
