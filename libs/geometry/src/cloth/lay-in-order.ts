@@ -33,13 +33,15 @@ interface Choice {
 }
 
 /** How well a panel fills a ledge: across it first, then level with a wall, then how much is left over. */
-function scoreOf(way: PanelWay, ledgeWidthMm: number, walls: readonly [number, number]): number {
-  const spare = ledgeWidthMm - way.widthMm;
-  const fills = spare < EPSILON_MM;
-  const levels = walls.filter((wall) => Math.abs(wall - way.lengthMm) < EPSILON_MM).length;
-  if (fills) return 4 + levels;
+function scoreOf(way: PanelWay, ledgeWidthMm: number, leftWallMm: number, rightWallMm: number): number {
+  // Asked for each panel at each ledge of each order that is tried: numbers alone.
+  const levels = isLevel(way, leftWallMm) + isLevel(way, rightWallMm);
+  if (ledgeWidthMm - way.widthMm < EPSILON_MM) return 4 + levels;
   return levels > 0 ? 2 : 1;
 }
+
+const isLevel = ({ lengthMm }: PanelWay, wallMm: number): number =>
+  Math.abs(wallMm - lengthMm) < EPSILON_MM ? 1 : 0;
 
 /**
  * Lays panels one by one on the lowest ledge: of those that fit, the first in the order that fills it best.
@@ -66,7 +68,7 @@ export function layInOrder(
       const { panel, ways } = left[at]!;
       for (const way of ways) {
         if (way.widthMm > ledge.widthMm + EPSILON_MM) continue;
-        const score = scoreOf(way, ledge.widthMm, [leftWallMm, rightWallMm]);
+        const score = scoreOf(way, ledge.widthMm, leftWallMm, rightWallMm);
         if (best && score <= best.score) continue;
         // Of panels alike only the first is tried on a ledge.
         const likeness = `${way.widthMm}/${way.lengthMm}/${way.controlMm ? panel.id : ''}`;
