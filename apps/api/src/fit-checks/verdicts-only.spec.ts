@@ -71,6 +71,19 @@ describe('margins for who sees no measures', () => {
     expect(shown({ verdict: 'wontFit', margin: -1.5 }, 'deg').margin).toBe(-1.5);
   });
 
+  it('say nothing of how far a cushion goes down, from which a weight could be reckoned', () => {
+    const drop = { lowMm: 19, bestMm: 27, highMm: 35, bottomsOut: 'no' as const, error: 0.3, sits: 0 };
+    const doubtful = {
+      margin: 16,
+      marginRange: { low: 7.9, high: 24.1 },
+      drops: [drop],
+      settleBySit: true as const,
+    };
+    const seen = shown({ verdict: 'tight', ...doubtful });
+    expect(Object.keys(seen).toSorted()).toEqual(['estimated', 'kind', 'margin', 'marginRange', 'verdict']);
+    expect(seen.marginRange).toEqual({ low: 0, high: 25.4 });
+  });
+
   it('keep what was erased empty', () => {
     const margin = null as unknown as number;
     expect(shown({ verdict: 'fits', margin }).margin).toBeNull();

@@ -15,6 +15,8 @@ const outcome: VerdictOutcome = {
   estimated: true,
   probability: { pass: 0, insideFail: 0.25 },
   settleWith: ['popliteal_height'],
+  drops: [{ lowMm: 19.25, bestMm: 27.5, highMm: 35.75, bottomsOut: 'no', error: 0.31, sits: 0 }],
+  settleBySit: true,
   bodyLedger: [{ label: 'Ottilie Brandt’s back of knee', value: 394.25, kind: 'term' }],
   setLedger: [{ label: 'sinks under Ottilie Brandt', value: 12.5, kind: 'term' }],
 };

@@ -38,6 +38,15 @@ function signed(text: string, value: number): string {
 /** The margin of a verdict; a stored sheet has lost those of people who were removed. */
 export type WithMargin = { margin: number | null; marginRange?: VerdictOutcome['marginRange'] | null };
 
+/** Short by no more than is shown, and sure of it: a range that hardly reaches over the line says nothing of room left. */
+const SURE_SHARE = 0.75;
+export const isSurelyShort = (
+  margin: number,
+  half: number | undefined,
+  unit: RuleUnit,
+  style: LengthStyle,
+): boolean => isJustShort(margin, unit, style) && (half === undefined || -margin >= SURE_SHARE * half);
+
 /** Margin and half its range, rounded to what is known; no range where nothing was predicted. */
 export function knownMargin(
   margin: number,
@@ -59,7 +68,7 @@ export function marginText(
 ): { margin: string; range: string | undefined } {
   if (outcome.margin === null) return { margin: REMOVED, range: undefined };
   const { margin, half } = knownMargin(outcome.margin, outcome.marginRange ?? null, unit, style);
-  if (half === undefined && isJustShort(margin, unit, style)) return { margin: JUST_SHORT, range: undefined };
+  if (isSurelyShort(margin, half, unit, style)) return { margin: JUST_SHORT, range: undefined };
   const shown = amountText(margin, unit, style);
   const text = shown === amountText(0, unit, style) ? `+${shown}` : signed(shown, margin);
   if (half === undefined) return { margin: text, range: undefined };

@@ -1,5 +1,6 @@
 import type { MeasureKey } from '../measures/measures.ts';
 import type { Body, Combination, JointComponent } from '../people/body.ts';
+import { covarianceOf, doubtsTogether, type Doubt } from './doubt.ts';
 
 /** What one body adds to an amount. */
 interface Term {
@@ -7,29 +8,36 @@ interface Term {
   parts: Combination;
 }
 
-/** A number that may hang on the measures of one or more bodies. */
+/** A number that may hang on the measures of one or more bodies, and on how far cushions go down. */
 export interface Amount {
   constant: number;
   terms: readonly Term[];
+  doubts: readonly Doubt[];
 }
 
 const NO_TERMS: readonly Term[] = [];
+const NO_DOUBTS: readonly Doubt[] = [];
 const NO_PARTS: Combination = [];
 
 /** A plain number. */
-export const fixed = (constant: number): Amount => ({ constant, terms: NO_TERMS });
+export const fixed = (constant: number): Amount => ({ constant, terms: NO_TERMS, doubts: NO_DOUBTS });
 
 /** A measure of a body, times a factor. */
 export const ofBody = (body: Body, key: MeasureKey, factor = 1): Amount => ({
   constant: 0,
   terms: [{ body, parts: [[key, factor]] }],
+  doubts: NO_DOUBTS,
 });
+
+/** `a` with the doubt about a cushion. */
+export const doubted = (a: Amount, doubt: Doubt): Amount => ({ ...a, doubts: [...a.doubts, doubt] });
 
 /** `a` + factor · `b`. */
 export function plus(a: Amount, b: Amount, factor = 1): Amount {
   const constant = a.constant + factor * b.constant;
-  if (b.terms.length === 0) return { constant, terms: a.terms };
-  if (a.terms.length === 0 && factor === 1) return { constant, terms: b.terms };
+  const doubts = doubtsTogether(a.doubts, b.doubts, factor);
+  if (b.terms.length === 0) return { constant, terms: a.terms, doubts };
+  if (a.terms.length === 0 && factor === 1) return { constant, terms: b.terms, doubts };
   const terms = a.terms.slice();
   for (const { body, parts } of b.terms) {
     const index = terms.findIndex((term) => term.body === body);
@@ -42,7 +50,7 @@ export function plus(a: Amount, b: Amount, factor = 1): Amount {
     if (index < 0) terms.push({ body, parts: sum });
     else terms[index] = { body, parts: sum };
   }
-  return { constant, terms };
+  return { constant, terms, doubts };
 }
 
 /** `a` − `b`. */
@@ -52,7 +60,7 @@ export const minus = (a: Amount, b: Amount): Amount => plus(a, b, -1);
 export const times = (a: Amount, factor: number): Amount => plus(fixed(0), a, factor);
 
 /** `a` moved by millimetres. */
-export const moved = (a: Amount, by: number): Amount => ({ constant: a.constant + by, terms: a.terms });
+export const moved = (a: Amount, by: number): Amount => ({ ...a, constant: a.constant + by });
 
 /** Best value of an amount. */
 export function best(amount: Amount): number {
@@ -83,12 +91,25 @@ export function collectPredicted(amount: Amount, found: PredictedMeasure[]): voi
 const MOST_COMPONENTS = 8;
 
 /**
- * What is believed of one or two amounts together: different bodies are independent.
+ * What is believed of one or two amounts together: different bodies are independent, and so are bodies and cushions.
  *
  * @param amounts - one or two amounts
  * @returns a mixture; weights add to 1
+ * @source how far a cushion goes down is taken as normal about its best value, the 90 % range as `sinkBand` gives it
  */
 export function jointOf(amounts: readonly Amount[]): JointComponent[] {
+  const components = jointOfBodies(amounts);
+  for (const [i, { doubts }] of amounts.entries()) {
+    if (doubts.length === 0) continue;
+    for (const [j, other] of amounts.entries()) {
+      const together = covarianceOf(doubts, other.doubts);
+      for (const { covariances } of components) (covariances[i] as number[])[j]! += together;
+    }
+  }
+  return components;
+}
+
+function jointOfBodies(amounts: readonly Amount[]): JointComponent[] {
   const bodies: Body[] = [];
   for (const { terms } of amounts) {
     for (const { body } of terms) if (!bodies.includes(body)) bodies.push(body);

@@ -296,7 +296,8 @@ describe('laws of a place', () => {
     fc.assert(
       fc.property(everyTape, fc.double({ min: 45, max: 140, noNaN: true }), (measured, weightKg) => {
         const who = person({ measured, weightKg, stature: { mm: 1700, source: 'measured' } });
-        const { rows } = check(set({ places: [furnished()] }), [sitter(who)]);
+        const foam = { ...FOAM, tested: { factor: 1, error: 0, sits: 1 } };
+        const { rows } = check(set({ places: [furnished({ foam })] }), [sitter(who)]);
         for (const { outcome } of rows[0]?.cells ?? []) {
           if (outcome.kind !== 'verdict') continue;
           expect(outcome.estimated).toBe(false);

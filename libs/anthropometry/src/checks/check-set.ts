@@ -131,9 +131,12 @@ function isBeyondChild(said: Said, { person }: Body): boolean {
   );
 }
 
-/** A verdict about nobody: there is no body to measure either. */
-const untold = (outcome: Outcome): Outcome =>
-  outcome.kind === 'verdict' ? { ...outcome, verdict: 'notKnown', estimated: true, settleWith: [] } : outcome;
+/** A verdict about nobody: there is no body to measure either, and none that sinks. */
+function untold(outcome: Outcome): Outcome {
+  if (outcome.kind !== 'verdict') return outcome;
+  const { drops: _drops, settleBySit: _sit, ...rest } = outcome;
+  return { ...rest, verdict: 'notKnown', estimated: true, settleWith: [] };
+}
 
 function pieceCell(
   rule: Rule,

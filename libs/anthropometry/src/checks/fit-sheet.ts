@@ -26,6 +26,23 @@ export interface LimitLines {
   upper?: number;
 }
 
+/** Best estimate of a drop, and the range it lies in with 90 in 100. */
+export interface SinkBand {
+  lowMm: number;
+  bestMm: number;
+  highMm: number;
+  /** Whether the foam bottoms out over the range: nowhere, in part of it, or all over. */
+  bottomsOut: 'no' | 'perhaps' | 'yes';
+}
+
+/** How far a cushion goes down under a sitter, in a verdict that hangs on it. */
+export interface CushionDrop extends SinkBand {
+  /** Half the 90 % range, of the drop. */
+  error: number;
+  /** Test sits that it rests on; 0 for the estimate by itself. */
+  sits: number;
+}
+
 /** A verdict with everything the slip shows. Values in the rule's unit. */
 export interface VerdictOutcome {
   kind: 'verdict';
@@ -37,13 +54,17 @@ export interface VerdictOutcome {
   fail: LimitLines;
   /** Room left to the nearest fail line; negative when missing. */
   margin: number;
-  /** 90 % range of the margin when something was predicted. */
+  /** 90 % range of the margin when something was predicted, the drop of a cushion included. */
   marginRange?: { low: number; high: number };
-  /** True when a predicted or told value decides. */
+  /** True when a predicted or told value decides, of the sitter or of how far the cushion goes down. */
   estimated: boolean;
   probability: { pass: number; insideFail: number };
   /** For an uncertain verdict: the tape measures that would settle it, most useful first. */
   settleWith: MeasureKey[];
+  /** Cushions that the value hangs on; absent where it hangs on none. */
+  drops?: CushionDrop[];
+  /** For an uncertain verdict: sitting on the foam would help to settle it. */
+  settleBySit?: true;
   bodyLedger: LedgerLine[];
   setLedger: LedgerLine[];
 }

@@ -2,11 +2,12 @@ import { MEASURE_INFO } from '../measures/measure-info.ts';
 import type { MeasureKey } from '../measures/measures.ts';
 import type { Body } from '../people/body.ts';
 import type { BodyModel } from '../people/body-model.ts';
-import { fixed, moved, ofBody, plus, times, type Amount } from './amount.ts';
+import { doubted, fixed, moved, ofBody, plus, times, type Amount } from './amount.ts';
 import type { LedgerLine } from './fit-sheet.ts';
 import { ledgerOf, type Entry } from './question.ts';
 import { ruleNumber, type Rule } from './rule-book.ts';
 import { seatSinkMm } from './seat-sink.ts';
+import { cushionDrop, sinkSpreadMm } from './sink-band.ts';
 import type { FoamSituation, PlaceSituation } from './situation.ts';
 import type { Question } from './verdict.ts';
 
@@ -58,21 +59,24 @@ const NO_SINK: Sink = { amount: fixed(0), bottomsOut: false };
 
 /**
  * How far a place's cushion goes down under a body. Around the best weight the sink is taken as straight in the
- * weight, so that a predicted weight keeps its doubt and its link with the other measures.
+ * weight, so that a predicted weight keeps its doubt and its link with the other measures. The doubt of the estimate
+ * itself stands beside it.
  *
  * @param foam - foam at the place; `undefined` for a hard seat
  * @param body - sitter
  * @returns millimetres as an amount
- * @source `seatSinkMm`
+ * @source `seatSinkMm`, `cushionDrop`
  */
 export function sinkUnder(foam: FoamSituation | undefined, body: Body): Sink {
   if (!foam || foam.thicknessMm === 0) return NO_SINK;
   const { weightKg } = body;
   const { sinkMm, bottomsOut } = seatSinkMm(foam, weightKg);
-  if (body.isMeasured('weight_kg')) return { amount: fixed(sinkMm), bottomsOut };
+  const doubt = { foam, drop: cushionDrop(foam, weightKg), by: sinkSpreadMm(foam, sinkMm) };
+  if (body.isMeasured('weight_kg')) return { amount: doubted(fixed(sinkMm), doubt), bottomsOut };
   const slope =
     seatSinkMm(foam, weightKg + HALF_KILOGRAM).sinkMm - seatSinkMm(foam, weightKg - HALF_KILOGRAM).sinkMm;
-  return { amount: moved(ofBody(body, 'weight_kg', slope), sinkMm - slope * weightKg), bottomsOut };
+  const straight = moved(ofBody(body, 'weight_kg', slope), sinkMm - slope * weightKg);
+  return { amount: doubted(straight, doubt), bottomsOut };
 }
 
 /** Pressed seat height under the sitter and the sum that leads to it. */

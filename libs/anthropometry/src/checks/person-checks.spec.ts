@@ -4,7 +4,7 @@ import { model, ruleBook } from '../../test/seed.ts';
 import type { Body } from '../people/body.ts';
 import { fixed, ofBody } from './amount.ts';
 import { PERSON_CHECKS } from './person-checks.ts';
-import { failLines } from './verdict.ts';
+import { failLines } from './fail-lines.ts';
 
 const never = () => {
   throw new Error('a check looked at the body before it was judged');

@@ -1,6 +1,7 @@
 import { best, fixed, plus, type Amount } from './amount.ts';
 import type { LedgerLine } from './fit-sheet.ts';
-import { failLines, type Question } from './verdict.ts';
+import { failLines } from './fail-lines.ts';
+import type { Question } from './verdict.ts';
 
 /** One named part of a sum. */
 export type Entry = readonly [label: string, amount: Amount];

@@ -61,7 +61,7 @@ export function roomWithin(value: Amount, band: Band): Room[] {
  * @returns the room, or `undefined` when the bands hang on different measures
  */
 export function roomMoved(rooms: readonly Room[], from: Band, to: Band): Room[] | undefined {
-  if (from.lower?.terms !== to.lower?.terms || from.upper?.terms !== to.upper?.terms) return undefined;
+  if (!hangsOnTheSame(from.lower, to.lower) || !hangsOnTheSame(from.upper, to.upper)) return undefined;
   const moves: number[] = [];
   if (from.lower && to.lower) moves.push(from.lower.constant - to.lower.constant);
   if (from.upper && to.upper) moves.push(to.upper.constant - from.upper.constant);
@@ -71,6 +71,9 @@ export function roomMoved(rooms: readonly Room[], from: Band, to: Band): Room[] 
     correlation,
   }));
 }
+
+const hangsOnTheSame = (a: Amount | undefined, b: Amount | undefined): boolean =>
+  a?.terms === b?.terms && a?.doubts === b?.doubts;
 
 /**
  * Probability that the room on every side is at least so much.

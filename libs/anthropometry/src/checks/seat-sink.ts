@@ -24,10 +24,12 @@ const LAST_STRAIN = 0.65;
 const POUNDS_PER_KG = 1 / 0.45359237;
 const NEWTONS_PER_POUND_FORCE = 4.4482216152605;
 
-/** Body weights that press a foam to its 25 % and to its 65 % line, kilograms. */
+/** Body weights that press a foam to its 25 % and to its 65 % line, kilograms, and what test sits make of them. */
 export interface FoamLoads {
   firstKg: number;
   lastKg: number;
+  /** By what the drop is multiplied; 1 without a sit. */
+  factor: number;
 }
 
 /**
@@ -36,13 +38,10 @@ export interface FoamLoads {
  * @param foam - 25 % IFD in newtons and support factor, both > 0
  * @source as `seatSinkMm`
  */
-export function foamLoads({
-  ifd25N,
-  supportFactor,
-}: Pick<FoamSituation, 'ifd25N' | 'supportFactor'>): FoamLoads {
+export function foamLoads({ ifd25N, supportFactor, tested }: Omit<FoamSituation, 'thicknessMm'>): FoamLoads {
   const first = ifd25N / NEWTONS_PER_POUND_FORCE / FOOT_SQUARE_INCHES;
   const firstKg = (first * PATCH_SQUARE_INCHES) / (PATCH_SHARE * SEAT_SHARE * POUNDS_PER_KG);
-  return { firstKg, lastKg: supportFactor * firstKg };
+  return { firstKg, lastKg: supportFactor * firstKg, factor: tested?.factor ?? 1 };
 }
 
 /**
@@ -53,14 +52,19 @@ export function foamLoads({
  * @returns 0 to 0.65
  * @source as `seatSinkMm`
  */
-export function strainUnder({ firstKg, lastKg }: FoamLoads, weightKg: number): number {
+export function strainUnder(loads: FoamLoads, weightKg: number): number {
+  return Math.min(LAST_STRAIN, loads.factor * estimated(loads, weightKg));
+}
+
+function estimated({ firstKg, lastKg }: FoamLoads, weightKg: number): number {
   if (weightKg > lastKg) return LAST_STRAIN;
   if (weightKg <= firstKg) return (FIRST_STRAIN * weightKg) / firstKg;
   return FIRST_STRAIN + ((LAST_STRAIN - FIRST_STRAIN) * (weightKg - firstKg)) / (lastKg - firstKg);
 }
 
 /**
- * How far a slab of new foam on a rigid deck goes down under a sitter. Trust it to about 30 %.
+ * How far a slab of new foam on a rigid deck goes down under a sitter, by test sits where there are any. How far to
+ * trust it: `sinkBand`.
  *
  * @param foam - thickness in millimetres, 25 % IFD in newtons, support factor; all > 0
  * @param weightKg - body weight; finite, >= 0
@@ -71,5 +75,6 @@ export function strainUnder({ firstKg, lastKg }: FoamLoads, weightKg: number): n
 export function seatSinkMm(foam: FoamSituation, weightKg: number): SeatSink {
   const loads = foamLoads(foam);
   const strain = strainUnder(loads, weightKg);
-  return { sinkMm: strain * foam.thicknessMm, strain, bottomsOut: weightKg > loads.lastKg };
+  const bottomsOut = weightKg > loads.lastKg || (loads.factor > 1 && strain >= LAST_STRAIN);
+  return { sinkMm: strain * foam.thicknessMm, strain, bottomsOut };
 }

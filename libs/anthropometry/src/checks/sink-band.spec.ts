@@ -31,7 +31,8 @@ describe('the band of a drop', () => {
     expect(sinkBand(FOAM, 130).bottomsOut).toBe('perhaps');
     expect(sinkBand({ ...FOAM, ifd25N: FOAM.ifd25N / 3 }, 200).bottomsOut).toBe('perhaps');
     expect(
-      sinkBand({ ...FOAM, ifd25N: FOAM.ifd25N / 3 }, 200, { factor: 1.6, error: 0.1, sits: 3 }).bottomsOut,
+      sinkBand({ ...FOAM, ifd25N: FOAM.ifd25N / 3, tested: { factor: 1.6, error: 0.1, sits: 3 } }, 200)
+        .bottomsOut,
     ).toBe('yes');
   });
 

@@ -4,6 +4,16 @@
  * said, angles in radians. `undefined` means "no such thing here".
  */
 
+/** What test sits say of the estimate of a drop. */
+export interface SinkCalibration {
+  /** By what the estimate is multiplied. */
+  factor: number;
+  /** Half the 90 % range of the outcome, of its value. */
+  error: number;
+  /** How many sits it rests on. */
+  sits: number;
+}
+
 /** Foam under the sitter, as its maker states it. */
 export interface FoamSituation {
   thicknessMm: number;
@@ -11,6 +21,8 @@ export interface FoamSituation {
   ifd25N: number;
   /** 65 % IFD over 25 % IFD. */
   supportFactor: number;
+  /** From test sits on it; absent where nobody tried it. */
+  tested?: SinkCalibration | undefined;
 }
 
 /** A sill near a place. */

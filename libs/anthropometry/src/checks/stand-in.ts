@@ -4,12 +4,13 @@ import type { KnownPerson } from '../people/person.ts';
 import { minus, ofBody, type Amount } from './amount.ts';
 import { worstFirst, type Found } from './answered.ts';
 import { judgementOf, type CheckInput } from './check-input.ts';
+import { failLines } from './fail-lines.ts';
 import { sinkUnder, type PersonCheck, type Said } from './person-check.ts';
 import { PERSON_CHECKS } from './person-checks.ts';
 import type { Rule } from './rule-book.ts';
 import type { PlaceSituation } from './situation.ts';
 import { differenceOf, shareSettledBy, type Difference, type Spread } from './stand-in-difference.ts';
-import { failLines, type Judgement, type Question } from './verdict.ts';
+import type { Judgement, Question } from './verdict.ts';
 
 /** One measure that a rule reads, of the stand-in less the cast member: above 0 where the stand-in has more. */
 export interface PartDifference extends Spread {

@@ -1,15 +1,17 @@
-import type { MeasureKey } from '../measures/measures.ts';
 import type { Body } from '../people/body.ts';
 import { saysSomething } from '../people/child-body.ts';
-import { best, collectPredicted, minus, type Amount, type PredictedMeasure } from './amount.ts';
+import { best, collectPredicted, type Amount, type PredictedMeasure } from './amount.ts';
+import { dropsIn } from './cushion-drops.ts';
+import { spreadOf } from './doubt.ts';
 import type { LedgerLine, LimitLines, Verdict, VerdictOutcome } from './fit-sheet.ts';
-import { probabilityOfRoom, roomMoved, roomQuantile, roomWithin, type Band } from './room.ts';
+import { failLines, type Lines } from './fail-lines.ts';
+import { isLineDoubtful, oddsOf, oddsOfValue } from './odds.ts';
+import type { Band } from './room.ts';
+import { NOTHING_SETTLES, settlingOf } from './settling.ts';
 
 /** What a rule asks: a value, and the lines it should keep between. */
-export interface Question {
+export interface Question extends Lines {
   value: Amount;
-  pass: Band;
-  fail: Band;
   /** The sum that leads to the lines of the side that is nearest. */
   bodyLedger: (side: 'lower' | 'upper') => LedgerLine[];
   setLedger: () => LedgerLine[];
@@ -21,9 +23,6 @@ export interface Judgement {
   tolerance: number;
 }
 
-/** Share of the margin's variance from which measuring is worth while. */
-const WORTH_MEASURING = 0.05;
-const MOST_MEASURES = 3;
 const ROUNDING = 1e-9;
 
 /** A verdict before its sums are written out. */
@@ -36,20 +35,6 @@ interface Finding extends Pick<
   side: 'lower' | 'upper';
   /** What was not taken from the sitter. */
   predicted: PredictedMeasure[];
-}
-
-/**
- * The fail lines that count: a fail line is never stricter than its pass line. A small sitter's own pass line may lie
- * beyond a fail line that is a plain number; then the two are one.
- *
- * @param question - lines in the rule's unit
- * @returns the fail lines, each side the rule's or the pass line
- */
-export function failLines({ pass, fail }: Pick<Question, 'pass' | 'fail'>): Band {
-  const band: Band = {};
-  if (fail.lower) band.lower = pass.lower && best(fail.lower) > best(pass.lower) ? pass.lower : fail.lower;
-  if (fail.upper) band.upper = pass.upper && best(fail.upper) < best(pass.upper) ? pass.upper : fail.upper;
-  return band;
 }
 
 /**
@@ -71,20 +56,14 @@ export function find(question: Question, judgement: Judgement): Finding {
   const toLower = fail.lower === undefined ? Infinity : value - fail.lower;
   const toUpper = fail.upper === undefined ? Infinity : fail.upper - value;
 
-  let probability: VerdictOutcome['probability'];
-  let marginRange: VerdictOutcome['marginRange'];
-  if (predicted.length === 0) {
-    const insidePass = isWithin(value, pass, judgement.tolerance) ? 1 : 0;
-    const insideFail = isWithin(value, fail, judgement.tolerance) ? 1 : insidePass;
-    probability = { pass: insidePass, insideFail };
-  } else {
-    const passRooms = roomWithin(question.value, question.pass);
-    const failRooms = roomMoved(passRooms, question.pass, failBand) ?? roomWithin(question.value, failBand);
-    const insidePass = probabilityOfRoom(passRooms, -judgement.tolerance);
-    const insideFail = Math.max(insidePass, probabilityOfRoom(failRooms, -judgement.tolerance));
-    probability = { pass: insidePass, insideFail };
-    marginRange = { low: roomQuantile(failRooms, 0.05), high: roomQuantile(failRooms, 0.95) };
-  }
+  const { probability, marginRange } =
+    predicted.length > 0 || isLineDoubtful(question)
+      ? oddsOf(question, failBand, judgement.tolerance)
+      : oddsOfValue(
+          { best: value, sd: spreadOf(question.value.doubts) },
+          { pass, fail },
+          judgement.tolerance,
+        );
   return {
     verdict: verdictFor(probability, judgement.confidence),
     value,
@@ -98,9 +77,6 @@ export function find(question: Question, judgement: Judgement): Finding {
   };
 }
 
-const isWithin = (value: number, { lower, upper }: LimitLines, tolerance: number): boolean =>
-  (lower === undefined || value >= lower - tolerance) && (upper === undefined || value <= upper + tolerance);
-
 /**
  * Adds to a finding both sums, and for an uncertain one the measures that would settle it.
  *
@@ -111,7 +87,9 @@ const isWithin = (value: number, { lower, upper }: LimitLines, tolerance: number
  */
 export function writeOut(question: Question, finding: Finding, judgement: Judgement): VerdictOutcome {
   const { verdict, value, pass, fail, margin, probability, marginRange, side, predicted } = finding;
-  const uncertain = predicted.length > 0 && isUncertain(probability, judgement.confidence);
+  const uncertain = isUncertain(probability, judgement.confidence);
+  const settling = uncertain ? settlingOf(question, side, predicted) : NOTHING_SETTLES;
+  const drops = dropsIn(question.value);
   const outcome: VerdictOutcome = {
     kind: 'verdict',
     verdict,
@@ -119,13 +97,15 @@ export function writeOut(question: Question, finding: Finding, judgement: Judgem
     pass,
     fail,
     margin,
-    estimated: predicted.length > 0,
+    estimated: predicted.length > 0 || (drops.length > 0 && !isPlain(probability)),
     probability,
-    settleWith: uncertain ? mostUseful(question, side, predicted) : [],
+    settleWith: settling.measures,
     bodyLedger: question.bodyLedger(side),
     setLedger: question.setLedger(),
   };
   if (marginRange) outcome.marginRange = marginRange;
+  if (drops.length > 0) outcome.drops = drops;
+  if (settling.bySit) outcome.settleBySit = true;
   return outcome;
 }
 
@@ -162,6 +142,11 @@ function linesOf({ lower, upper }: Band): LimitLines {
   return lines;
 }
 
+/** From here on a probability counts as plain yes or no: the drop of a cushion decides nothing. */
+const PLAIN = 1e-3;
+const isPlain = ({ pass, insideFail }: VerdictOutcome['probability']): boolean =>
+  [pass, insideFail].every((p) => p < PLAIN || p > 1 - PLAIN);
+
 /** Value and lines that hang on a body. */
 const amountsIn = ({ value, pass, fail }: Question): Amount[] =>
   [value, pass.lower, pass.upper, fail.lower, fail.upper].filter(
@@ -183,32 +168,4 @@ function predictedIn(question: Question): PredictedMeasure[] {
   const found: PredictedMeasure[] = [];
   for (const amount of amountsIn(question)) collectPredicted(amount, found);
   return found;
-}
-
-/** Measures ordered by how much of the margin's variance goes once they are known. */
-function mostUseful(
-  question: Question,
-  side: 'lower' | 'upper',
-  predicted: readonly PredictedMeasure[],
-): MeasureKey[] {
-  const line = failLines(question)[side] ?? question.pass[side];
-  if (!line) return [];
-  const margin = minus(question.value, line);
-  const shares = new Map<MeasureKey, number>();
-  for (const { body, key } of predicted) {
-    const parts = margin.terms.find((term) => term.body === body)?.parts ?? [];
-    let removed = 0;
-    let total = 0;
-    for (const { weight, covariances } of body.joint([parts, [[key, 1]]])) {
-      const [[variance = 0, together = 0] = [], [, own = 0] = []] = covariances;
-      total += weight * variance;
-      removed += own > 0 ? (weight * together * together) / own : 0;
-    }
-    if (total > 0) shares.set(key, Math.max(shares.get(key) ?? 0, removed / total));
-  }
-  return [...shares]
-    .filter(([, share]) => share >= WORTH_MEASURING)
-    .sort(([, a], [, b]) => b - a)
-    .slice(0, MOST_MEASURES)
-    .map(([key]) => key);
 }

@@ -52,3 +52,6 @@ export function normalQuantile(p: number): number {
   }
   return z;
 }
+
+/** Standard deviations from the middle of a normal to either end of a 90 % range. */
+export const Z90 = normalQuantile(0.95);

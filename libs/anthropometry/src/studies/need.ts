@@ -5,7 +5,7 @@ import type { Draws } from '../populations/population.ts';
 import { NOBODY, OPEN, STEPS_PER_MM, wordsFor, type NeedColumn } from './bits.ts';
 
 /** The foam of a seat without its thickness. */
-export type Firmness = Pick<FoamSituation, 'ifd25N' | 'supportFactor'>;
+export type Firmness = Omit<FoamSituation, 'thicknessMm'>;
 
 /**
  * What bodies need of a set by one line of a rule: a linear combination of measures, and the share of its thickness
@@ -46,7 +46,8 @@ const DIGITS = 12;
 const NOTHING = 1e-12;
 
 /** The same for foams under which people sink alike. */
-export const foamName = ({ ifd25N, supportFactor }: Firmness): string => `${ifd25N}/${supportFactor}`;
+export const foamName = ({ ifd25N, supportFactor, tested }: Firmness): string =>
+  `${ifd25N}/${supportFactor}${tested ? `*${tested.factor}` : ''}`;
 
 /**
  * Splits a line into what bodies need and what the set offers.

@@ -4,7 +4,9 @@ import {
   loadRuleBook,
   type FitSheet,
   type KnownPerson,
+  type LimitLines,
   type Sitter,
+  type VerdictOutcome,
 } from '@settlewright/anthropometry';
 import rules from '@settlewright/seed-data/fit-rules.json' with { type: 'json' };
 import survey from '@settlewright/seed-data/populations/ansur2.json' with { type: 'json' };
@@ -53,6 +55,12 @@ const check = (document: SetDocument, who = sitters): FitSheet =>
     model,
     settings: { backPosture: 'dining', trafficBehind: 'none' },
   });
+
+function cellOf(sheet: FitSheet, ruleId: string): VerdictOutcome {
+  const outcome = sheet.rows[0]?.cells.find((cell) => cell.ruleId === ruleId)?.outcome;
+  if (outcome?.kind !== 'verdict') throw new Error(`no verdict by ${ruleId}`);
+  return outcome;
+}
 
 const bay = (): SetDocument => {
   const found = ARRANGEMENTS.find(({ id }) => id === 'facing-benches');
@@ -178,26 +186,25 @@ describe('a story stick of the seat height', () => {
 
   it('finds the bands that the lines of the sheet give', () => {
     const [row] = stick.rows;
-    const needs = seatHeightNeeds(document, check(document), 'b1').bands[0];
-    expect(row?.fits).toEqual([
-      {
-        from: expect.closeTo(needs?.fits.lower as number, 3),
-        to: expect.closeTo(needs?.fits.upper as number, 3),
-      },
-    ]);
-    expect(row?.tight).toEqual([
-      {
-        from: expect.closeTo(needs?.tight.lower as number, 3),
-        to: expect.closeTo(needs?.tight.upper as number, 3),
-      },
-    ]);
+    const needs = seatHeightNeeds(document, check(document), 'b1').bands[0]!;
+    // A stick's bands go by best values; those of the seat height are drawn in by what the cushion leaves open.
+    const whole = ({ lower, upper }: LimitLines) => ({
+      from: expect.closeTo(lower! - needs.drawnInMm, 3),
+      to: expect.closeTo(upper! + needs.drawnInMm, 3),
+    });
+    expect(needs.drawnInMm).toBeGreaterThan(0);
+    expect(row?.fits).toEqual([whole(needs.fits)]);
+    expect(row?.tight).toEqual([whole(needs.tight)]);
   });
 
-  it('has hard ends for a measured sitter and a range for one who was told', () => {
+  it('has the range of the cushion for a measured sitter and a wider one for one who was told', () => {
     const [measured, told] = stick.rows;
     const [band] = told?.tight ?? [];
-    expect(measured?.estimated).toBe(false);
-    expect(measured?.perhapsTight).toEqual(measured?.tight);
+    const { drops } = cellOf(check(document), 'SEAT-02');
+    const { lowMm, bestMm, highMm } = drops![0]!;
+    const [whole, perhaps] = [measured?.tight[0], measured?.perhapsTight[0]];
+    expect(perhaps?.to).toBeCloseTo((whole?.to ?? 0) + highMm - bestMm, 1);
+    expect(perhaps?.from).toBeCloseTo((whole?.from ?? 0) - (bestMm - lowMm), 1);
     expect(told?.estimated).toBe(true);
     expect(told?.perhapsTight[0]?.from).toBeLessThan((band?.from ?? 0) - 5);
     expect(told?.surelyTight[0]?.from ?? Infinity).toBeGreaterThan((band?.from ?? 0) + 5);

@@ -12,7 +12,7 @@ export interface StickRow {
   sitterId: string;
   placeId: string;
   name: string;
-  /** Best values of somebody who was not measured. */
+  /** Best values: of somebody who was not measured, or of how far a cushion goes down where that decides. */
   estimated: boolean;
   /** Where the sitter fits, by best values. */
   fits: Stretch[];
@@ -20,7 +20,7 @@ export interface StickRow {
   tight: Stretch[];
   /**
    * Where each shown check keeps its fail line at the low end of its own 90 % range, and at the high end; as `tight`
-   * when measured. One check alone holds for 95, or for 5, of 100 such people; several together for no share that
+   * when measured and on a hard seat. One check alone holds for 95, or for 5, of 100 such people; several together for no share that
    * follows from their ranges.
    */
   surelyTight: Stretch[];

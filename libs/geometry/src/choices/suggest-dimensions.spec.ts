@@ -56,7 +56,7 @@ const input = (change: Partial<SuggestInput>): SuggestInput => ({
   document: bay,
   dimensions,
   free: [free('seat-height', 76), free('seat-depth', 51)],
-  check: checkOf([seated('one', 'b1:1', 'women', 30), seated('other', 'b2:1', 'women', 60)]),
+  check: checkOf([seated('one', 'b1:1', 'women', 40), seated('other', 'b2:1', 'women', 75)]),
   most: 70,
   ...change,
 });

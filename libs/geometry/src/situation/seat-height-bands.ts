@@ -1,4 +1,11 @@
-import type { FitSheet, LimitLines, Verdict } from '@settlewright/anthropometry';
+import {
+  normalQuantile,
+  Z90,
+  type FitSheet,
+  type LimitLines,
+  type Verdict,
+  type VerdictOutcome,
+} from '@settlewright/anthropometry';
 import { pressedSeatHeightMm } from '../pieces/seat-sink.ts';
 import type { SetDocument } from '../room/document.ts';
 
@@ -8,11 +15,13 @@ export interface SeatHeightBand {
   placeId: string;
   name: string;
   verdict: Verdict;
+  /** How far both are drawn in, since the cushion may go down less or more, millimetres; 0 without a cushion. */
+  drawnInMm: number;
   /** Where the sitter fits, as pressed seat height under the reference sitter. */
   fits: LimitLines;
   /** Where the sitter is at least tight. */
   tight: LimitLines;
-  /** Best values of somebody who was not measured. */
+  /** Best values: of somebody who was not measured, or of how far the cushion goes down where that decides. */
   estimated: boolean;
 }
 
@@ -29,7 +38,8 @@ const RULE = 'SEAT-02';
  * The seat heights that the sitters of one bench need, read off the sheet's own lines.
  *
  * Each sitter sinks by an own amount, so a limit is carried over as the difference from where that sitter's seat
- * is now to the pressed seat height under the reference sitter.
+ * is now to the pressed seat height under the reference sitter. Lines are drawn in by what is not known of how far the
+ * cushion goes down, with the probability that the sheet's verdicts ask for.
  *
  * @param document - the set
  * @param sheet - its fit sheet, with full detail
@@ -46,16 +56,24 @@ export function seatHeightNeeds(document: SetDocument, sheet: FitSheet, pieceId:
     .flatMap((row): SeatHeightBand[] => {
       const outcome = row.cells.find((cell) => cell.ruleId === RULE)?.outcome;
       if (outcome?.kind !== 'verdict') return [];
-      const carried = (lines: LimitLines): LimitLines => ({
-        ...(lines.lower === undefined ? {} : { lower: pressed + lines.lower - outcome.value }),
-        ...(lines.upper === undefined ? {} : { upper: pressed + lines.upper - outcome.value }),
+      const drawnInMm = doubtOf(outcome, sheet.confidence);
+      const carried = ({ lower, upper }: LimitLines): LimitLines => ({
+        ...(lower === undefined ? {} : { lower: pressed + lower - outcome.value + drawnInMm }),
+        ...(upper === undefined ? {} : { upper: pressed + upper - outcome.value - drawnInMm }),
       });
       const { sitterId, placeId, name } = row;
       const { verdict, estimated, pass, fail } = outcome;
-      return [{ sitterId, placeId, name, verdict, estimated, fits: carried(pass), tight: carried(fail) }];
+      const lines = { fits: carried(pass), tight: carried(fail) };
+      return [{ sitterId, placeId, name, verdict, estimated, drawnInMm, ...lines }];
     });
   const lowerMm = Math.max(...bands.map(({ fits }) => fits.lower ?? 0));
   const upperMm = Math.min(...bands.map(({ fits }) => fits.upper ?? Infinity));
   const met = bands.length > 0 && lowerMm <= upperMm;
   return { bands, common: met ? { lowerMm, upperMm } : undefined };
+}
+
+/** How far from a line the best drop has to stay for the verdict to be as sure as asked. */
+function doubtOf({ drops = [] }: VerdictOutcome, confidence: number): number {
+  const ends = drops.map(({ error, bestMm }) => error * bestMm);
+  return (normalQuantile(confidence) / Z90) * Math.hypot(...ends);
 }

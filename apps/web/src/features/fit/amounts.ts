@@ -1,7 +1,14 @@
 import { type FitCell, type Outcome, type RuleBook, type RuleUnit } from '@settlewright/anthropometry';
 import { spokenLength, type LengthStyle } from '@settlewright/geometry';
 import { verdictWord } from '@/components/verdict.tsx';
-import { amountText, isJustShort, JUST_SHORT, knownMargin, REMOVED, type WithMargin } from '@/lib/margins.ts';
+import {
+  amountText,
+  isSurelyShort,
+  JUST_SHORT,
+  knownMargin,
+  REMOVED,
+  type WithMargin,
+} from '@/lib/margins.ts';
 
 export { amountText, marginText, REMOVED } from '@/lib/margins.ts';
 
@@ -14,7 +21,7 @@ function spokenAmount(value: number, unit: RuleUnit, style: LengthStyle): string
 function spokenMargin(outcome: WithMargin, unit: RuleUnit, style: LengthStyle): string {
   if (outcome.margin === null) return REMOVED;
   const { margin, half } = knownMargin(outcome.margin, outcome.marginRange ?? null, unit, style);
-  if (half === undefined && isJustShort(margin, unit, style)) return JUST_SHORT;
+  if (isSurelyShort(margin, half, unit, style)) return JUST_SHORT;
   const spoken = spokenAmount(margin, unit, style);
   const sign = spoken.startsWith('minus') ? '' : 'plus ';
   const doubt = half === undefined ? '' : `, give or take ${spokenAmount(half, unit, style)}`;

@@ -1,5 +1,6 @@
 import type { LedgerLine, RuleUnit, VerdictOutcome } from '@settlewright/anthropometry';
 import { lengthStep, type LengthStyle } from '@settlewright/geometry';
+import { knownMargin } from '@/lib/margins.ts';
 
 /** The smallest difference that a number of a check can show. */
 function stepOf(unit: RuleUnit, style: LengthStyle): number {
@@ -55,7 +56,7 @@ export interface Shown {
 export interface MarginSum {
   from: Shown;
   take: Shown;
-  /** False for a prediction, whose margin is rounded to what is known. */
+  /** False for a prediction whose margin is rounded to what is known. */
   closes: boolean;
 }
 
@@ -75,9 +76,10 @@ export function marginSum(
   if (side === undefined) return undefined;
   const rounded = (amount: number) => Math.round(amount / step);
   let [from, take] = [rounded(side.from), rounded(side.take)];
+  const isFine = knownMargin(margin, marginRange ?? null, unit, style).margin === margin;
   // Each of three figures is rounded by itself; the one that was rounded most gives way by one step.
   const missing = rounded(margin) - (from - take);
-  if (marginRange === undefined && Math.abs(missing) === 1) {
+  if (isFine && Math.abs(missing) === 1) {
     const lostFrom = (side.from / step - from) * missing;
     const lostTake = (take - side.take / step) * missing;
     if (lostFrom > lostTake) from += missing;
@@ -86,6 +88,6 @@ export function marginSum(
   return {
     from: { exact: side.from, shown: from * step },
     take: { exact: side.take, shown: take * step },
-    closes: marginRange === undefined && from - take === rounded(margin),
+    closes: isFine && from - take === rounded(margin),
   };
 }

@@ -5,6 +5,7 @@ import { Verdict, verdictTone } from '@/components/verdict.tsx';
 import { amountText, REMOVED } from '../amounts.ts';
 import { useFitView } from '../fit-view.ts';
 import { marginSum, type MarginSum } from '../sums.ts';
+import { DropWords } from './drop-words.tsx';
 import { Margin } from './fit-cell.tsx';
 import { Ledger } from './ledger.tsx';
 import { MeasureLink } from './measure-link.tsx';
@@ -90,30 +91,39 @@ export function Sums({ outcome, ruleId }: Props) {
   );
 }
 
-/** How sure a predicted verdict is, how sure it has to be, and which measure would settle it. */
+/** How sure a verdict is, how sure it has to be, and which measure, or a test sit, would settle it. */
 export function Doubt({ outcome, cell, of }: { outcome: VerdictOutcome; cell: FitCell; of: string }) {
   const { sheet } = useFitView();
-  if (!outcome.estimated || typeof outcome.margin !== 'number') return null;
+  if (typeof outcome.margin !== 'number') return null;
+  const { drops = [], settleBySit } = outcome;
   const inHundred = (probability: number) => Math.round(probability * 100);
   const settling = outcome.settleWith.slice(0, 2);
   return (
-    <p className="mt-2 text-sm text-ink-2">
-      Predicted, not measured: {inHundred(outcome.probability.pass)} in 100 such people fit,{' '}
-      {inHundred(outcome.probability.insideFail)} in 100 are at least tight; a verdict asks for{' '}
-      {inHundred(sheet.confidence)}.
-      {settling.length > 0 && (
-        <strong className="font-semibold text-ink">
-          {' '}
-          To settle it, measure{' '}
-          {settling.map((key, index) => (
-            <Fragment key={key}>
-              {index > 0 && ' and '}
-              <MeasureLink castId={cell.sitterId} of={of} measure={key} />
-            </Fragment>
-          ))}
-          .
-        </strong>
+    <>
+      <DropWords drops={drops} />
+      {outcome.estimated && (
+        <p className="mt-2 text-sm text-ink-2">
+          Predicted, not measured: {inHundred(outcome.probability.pass)} in 100 such{' '}
+          {drops.length > 0 ? 'people on such foam' : 'people'} fit,{' '}
+          {inHundred(outcome.probability.insideFail)} in 100 are at least tight; a verdict asks for{' '}
+          {inHundred(sheet.confidence)}.
+          {(settling.length > 0 || settleBySit) && (
+            <strong className="font-semibold text-ink">
+              {' '}
+              To settle it,{settling.length > 0 && ' measure '}
+              {settling.map((key, index) => (
+                <Fragment key={key}>
+                  {index > 0 && ' and '}
+                  <MeasureLink castId={cell.sitterId} of={of} measure={key} />
+                </Fragment>
+              ))}
+              {settleBySit &&
+                `${settling.length > 0 ? ', and' : ''} sit on this foam and measure how far it goes down`}
+              .
+            </strong>
+          )}
+        </p>
       )}
-    </p>
+    </>
   );
 }

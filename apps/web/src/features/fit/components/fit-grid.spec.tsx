@@ -87,10 +87,35 @@ describe('the slip of a cell', () => {
     );
     expect(slip()).toHaveTextContent(/^won’t fit.*″ − .*″ = −.*Back of knee/);
     expect(inSlip.getByText(/crook of Hetty Vance’s knee/)).toBeVisible();
+    expect(inSlip.getByText(/^The cushion goes down/)).toHaveTextContent(
+      /½″.* to .*″ in 90 of 100 cases \(estimate, give or take 30 %, from memory\)\.$/,
+    );
     expect(inSlip.getByText(/Rule SEAT-02, from memory\. Coefficients/)).toBeVisible();
     expect(inSlip.getByText('What would change it, and for whom')).toBeVisible();
     const fixes = await inSlip.findByRole('list', { name: 'What would change it, and for whom' });
     expect(within(fixes).getAllByText(/^Hetty, seat height: (fits|tight)/)[0]).toBeVisible();
+  });
+
+  it('says of a verdict that hangs on the cushion what sitting on it would settle', async () => {
+    const user = userEvent.setup();
+    const near = mapped(({ outcome, ...cell }) => ({
+      ...cell,
+      outcome:
+        outcome.kind === 'verdict' && outcome.drops
+          ? { ...outcome, verdict: 'notKnown', estimated: true, settleBySit: true, settleWith: [] }
+          : outcome,
+    }));
+    const { change } = showSheet(<FitGrid ground="paper" />, { sheet: near });
+    await user.click(hetty());
+    expect(within(slip()).getByText(/^To settle it, sit on this foam/)).toBeVisible();
+    const drop = { error: 0.13, sits: 2, lowMm: 10, bestMm: 12, highMm: 14, bottomsOut: 'no' as const };
+    change({
+      sheet: mapped(({ outcome, ...cell }) => ({
+        ...cell,
+        outcome: outcome.kind === 'verdict' ? { ...outcome, drops: [drop] } : outcome,
+      })),
+    });
+    expect(within(slip()).getByText(/by 2 test sits, give or take 13 %/)).toBeVisible();
   });
 
   it('takes a fix as it was shown', async () => {

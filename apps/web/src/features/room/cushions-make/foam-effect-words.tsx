@@ -1,4 +1,4 @@
-import type { Verdict } from '@settlewright/anthropometry';
+import { SINK_ERROR, SOURCE_MARK_WORDS, type Verdict } from '@settlewright/anthropometry';
 import { verdictWord } from '@/components/verdict.tsx';
 import { useFormat } from '@/lib/format.ts';
 import type { FoamEffect, SeatUnder } from './foam-effect.ts';
@@ -76,16 +76,17 @@ export function FoamEffectWords({
       {isSeat && (
         <>
           <p className="text-ink-2">
-            How far the foam goes down is an estimate, give or take 30 %. Lightest and heaviest of those who
-            sit here{differs ? ', with it' : ''}:
+            How far the foam goes down is an estimate, give or take {Math.round(SINK_ERROR.share * 100)} % (
+            {SOURCE_MARK_WORDS[SINK_ERROR.mark]}). Lightest and heaviest of those who sit here
+            {differs ? ', with it' : ''}:
           </p>
           <ul className="list-disc pl-5">
             <Seat seat={lightest} />
             {heaviest.name !== lightest.name && <Seat seat={heaviest} />}
           </ul>
           <p className="text-ink-2">
-            Verdicts are given from the middle of that range; near a limit, try the seat before the batch is
-            cut.
+            Verdicts count all of that range: nobody fits where it leaves that open. A test sit on the foam
+            narrows it.
           </p>
         </>
       )}
