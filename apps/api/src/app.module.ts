@@ -2,6 +2,7 @@ import { Module } from '@nestjs/common';
 import { ConfigModule, type ConfigType } from '@nestjs/config';
 import { ScheduleModule } from '@nestjs/schedule';
 import { LoggerModule } from 'nestjs-pino';
+import { ArrangementsModule } from './arrangements/arrangements.module';
 import { AuditModule } from './audit/audit.module';
 import { AuthModule } from './auth/auth.module';
 import { CastModule } from './cast/cast.module';
@@ -54,6 +55,7 @@ import { WorkshopsModule } from './workshops/workshops.module';
     ChoicesModule,
     UpholsterersModule,
     CushionSettingsModule,
+    ArrangementsModule,
     CushionOrdersModule,
     DemoModule,
     CastErasureModule,

@@ -1,3 +1,4 @@
+import { KeptArrangement } from '../arrangements/kept-arrangement.entity';
 import { AuditEntry } from '../audit/entities/audit-entry.entity';
 import { MailedToken } from '../auth/entities/mailed-token.entity';
 import { RefreshToken } from '../auth/entities/refresh-token.entity';
@@ -45,6 +46,7 @@ export const ENTITIES = [
   DesignedSet,
   DimensionSearch,
   Invitation,
+  KeptArrangement,
   MailedToken,
   Membership,
   OrderEvent,

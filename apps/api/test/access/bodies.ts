@@ -18,6 +18,7 @@ export function bodiesFor(shop: Shop): Record<string, object> {
     'POST /auth/email/change': { newEmail: email, password: 'not asked again' },
     [`PATCH ${W}`]: { telephone: '555 01 02' },
     [`PUT ${W}/cushion-settings`]: { baseNumber: 0, settings: { allowancesMm: {}, foams: [] } },
+    [`POST ${W}/arrangements`]: { name: 'Booth of six', document: shop.document },
     [`PATCH ${W}/members/{userId}`]: { role: 'reviewer' },
     [`POST ${W}/invitations`]: { email, role: 'reviewer' },
     [`POST ${W}/productions`]: { name: 'Another' },

@@ -71,6 +71,7 @@ export async function createShop(test: TestApp, name: string): Promise<Shop> {
     note: 'to sit in',
   });
   const note = await make(`${S}/notes`, { text: 'Mind the sill', kind: 'comment' });
+  const arrangement = await make(`${W}/arrangements`, { name: 'Booth of four', document: draft.document });
   const email = `upholsterer-${workshopId}@cushions.test`;
   const upholsterer = await make(`${W}/upholsterers`, { name: 'Cushions and Sons', email });
   const order = await make(`${P}/orders`, {
@@ -128,6 +129,7 @@ export async function createShop(test: TestApp, name: string): Promise<Shop> {
       suggestionId: suggestion.id,
       populationId: population.id,
       upholstererId: upholsterer.id,
+      arrangementId: arrangement.id,
       orderId: order.id,
       quoteId: quotes[0]?.id ?? '',
       questionId: questions[0]?.id ?? '',

@@ -1173,6 +1173,38 @@ export interface paths {
         patch: operations["Upholsterers_update"];
         trace?: never;
     };
+    "/api/workshops/{workshopId}/arrangements": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        get: operations["Arrangements_list"];
+        put?: never;
+        post: operations["Arrangements_keep"];
+        delete?: never;
+        options?: never;
+        head?: never;
+        patch?: never;
+        trace?: never;
+    };
+    "/api/workshops/{workshopId}/arrangements/{arrangementId}": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        get?: never;
+        put?: never;
+        post?: never;
+        delete: operations["Arrangements_remove"];
+        options?: never;
+        head?: never;
+        patch?: never;
+        trace?: never;
+    };
     "/api/workshops/{workshopId}/productions/{productionId}/orders": {
         parameters: {
             query?: never;
@@ -3941,6 +3973,30 @@ export interface components {
             currency?: string | null;
             /** @description their connected account at the payment provider, as acct_…; without one deposits are recorded by hand */
             accountId?: string | null;
+        };
+        ArrangementDto: {
+            /** Format: uuid */
+            id: string;
+            name: string;
+            /** @description SetDocument of the geometry library */
+            document: {
+                [key: string]: unknown;
+            };
+            /** Format: date-time */
+            keptAt: string;
+        };
+        ArrangementPage: {
+            items: components["schemas"]["ArrangementDto"][];
+            total: number;
+            page: number;
+            pageSize: number;
+        };
+        KeepArrangementDto: {
+            name: string;
+            /** @description a set document; its pieces and cushions are kept, and nobody who sits in it */
+            document: {
+                [key: string]: unknown;
+            };
         };
         /** @enum {string} */
         OrderState: "draft" | "sent" | "quoted" | "agreed" | "first-article" | "in-work" | "shipped" | "received" | "closed" | "cancelled";
@@ -8272,6 +8328,105 @@ export interface operations {
                 content: {
                     "application/json": components["schemas"]["UpholstererDto"];
                 };
+            };
+            /** @description what went wrong (RFC 9457) */
+            default: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemBody"];
+                };
+            };
+        };
+    };
+    Arrangements_list: {
+        parameters: {
+            query?: {
+                page?: unknown;
+                pageSize?: unknown;
+                sort?: string;
+                order?: "asc" | "desc";
+                search?: string;
+            };
+            header?: never;
+            path: {
+                workshopId: unknown;
+            };
+            cookie?: never;
+        };
+        requestBody?: never;
+        responses: {
+            200: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["ArrangementPage"];
+                };
+            };
+            /** @description what went wrong (RFC 9457) */
+            default: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemBody"];
+                };
+            };
+        };
+    };
+    Arrangements_keep: {
+        parameters: {
+            query?: never;
+            header?: never;
+            path: {
+                workshopId: unknown;
+            };
+            cookie?: never;
+        };
+        requestBody: {
+            content: {
+                "application/json": components["schemas"]["KeepArrangementDto"];
+            };
+        };
+        responses: {
+            201: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["ArrangementDto"];
+                };
+            };
+            /** @description what went wrong (RFC 9457) */
+            default: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemBody"];
+                };
+            };
+        };
+    };
+    Arrangements_remove: {
+        parameters: {
+            query?: never;
+            header?: never;
+            path: {
+                arrangementId: string;
+                workshopId: unknown;
+            };
+            cookie?: never;
+        };
+        requestBody?: never;
+        responses: {
+            204: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content?: never;
             };
             /** @description what went wrong (RFC 9457) */
             default: {

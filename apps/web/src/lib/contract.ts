@@ -17,6 +17,7 @@ export type Invitation = Schema['InvitationDto'];
 /** What the holder of an invitation sees before joining. */
 export type InvitationOffer = Schema['OpenInvitationDto'];
 export type Upholsterer = Schema['UpholstererDto'];
+export type KeptArrangement = Omit<Schema['ArrangementDto'], 'document'> & { document: SetDocument };
 export type Production = Schema['ProductionDto'];
 export type UnitSystem = Production['units'];
 export type RoundTo = Production['roundTo'];

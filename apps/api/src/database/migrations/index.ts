@@ -11,6 +11,7 @@ import { DimensionSearches1796170200000 } from './1796170200000-dimension-search
 import { LifeOfAnOrder1796201340000 } from './1796201340000-life-of-an-order';
 import { CushionSettings1796202960000 } from './1796202960000-cushion-settings';
 import { ClothsOfAnOrder1796206800000 } from './1796206800000-cloths-of-an-order';
+import { Arrangements1796238000000 } from './1796238000000-arrangements';
 
 /** In the order in which they run. What is merged is never changed. */
 export const MIGRATIONS: (new () => MigrationInterface)[] = [
@@ -26,4 +27,5 @@ export const MIGRATIONS: (new () => MigrationInterface)[] = [
   LifeOfAnOrder1796201340000,
   CushionSettings1796202960000,
   ClothsOfAnOrder1796206800000,
+  Arrangements1796238000000,
 ];

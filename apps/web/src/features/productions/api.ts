@@ -1,4 +1,5 @@
 import { keepPreviousData, useMutation, useQuery, useQueryClient } from '@tanstack/react-query';
+import type { SetDocument } from '@settlewright/geometry';
 import { api } from '@/lib/api-client.ts';
 import type { OrderSummary, Page, Production, SetSummary } from '@/lib/contract.ts';
 import { productionKey, productionPath } from '@/lib/production.ts';
@@ -68,7 +69,7 @@ export function useSets(workshopId: string, productionId: string, status: 'activ
 export function useAddSet(workshopId: string, productionId: string) {
   const client = useQueryClient();
   return useMutation({
-    mutationFn: (input: { name: string; arrangement: string }) =>
+    mutationFn: (input: { name: string } & ({ arrangement: string } | { document: SetDocument })) =>
       api.post<SetSummary>(`${productionPath(workshopId, productionId)}/sets`, input),
     onSuccess: () => client.invalidateQueries({ queryKey: setsKey(workshopId, productionId) }),
   });

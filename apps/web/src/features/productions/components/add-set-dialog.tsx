@@ -9,17 +9,29 @@ import { TextField } from '@/components/text-field.tsx';
 import { applyProblem } from '@/lib/form-problem.ts';
 import { useProduction } from '@/lib/production.ts';
 import { useWorkshop } from '@/lib/workshop.ts';
+import { useArrangements } from '@/lib/arrangements.ts';
+import type { KeptArrangement } from '@/lib/contract.ts';
 import { useAddSet } from '../api.ts';
 
-function usePlans() {
+const NONE: readonly KeptArrangement[] = [];
+
+/** The usual arrangements and those that the workshop keeps, each with its plan. */
+function usePlans(kept: readonly KeptArrangement[]) {
   return useMemo(() => {
-    const plans = ARRANGEMENTS.map((arrangement) => ({ ...arrangement, plan: planOf(arrangement.build()) }));
+    const usual = ARRANGEMENTS.map((one) => ({ ...one, document: one.build() }));
+    const own = kept.map(({ id, name, document }) => ({
+      id,
+      title: name,
+      words: 'Kept by the workshop.',
+      document,
+    }));
+    const plans = [...usual, ...own].map((one) => ({ ...one, plan: planOf(one.document) }));
     const pxPerMm = commonScale(
       plans.map(({ plan }) => plan),
       { width: 190, height: 92 },
     );
     return { plans, pxPerMm };
-  }, []);
+  }, [kept]);
 }
 
 interface AddSetDialogProps {
@@ -37,7 +49,8 @@ export function AddSetDialog({ open, onClose }: AddSetDialogProps) {
   const form = useForm<{ name: string; arrangement: string }>({
     defaultValues: { name: '', arrangement: 'facing-benches' },
   });
-  const { plans, pxPerMm } = usePlans();
+  const kept = useArrangements(workshop.id, open).data ?? NONE;
+  const { plans, pxPerMm } = usePlans(kept);
   const close = () => {
     setProblem(null);
     form.reset();
@@ -45,7 +58,9 @@ export function AddSetDialog({ open, onClose }: AddSetDialogProps) {
   };
   const submit = form.handleSubmit((values) => {
     setProblem(null);
-    add.mutate(values, {
+    const own = kept.find(({ id }) => id === values.arrangement);
+    const sent = own ? { name: values.name, document: own.document } : values;
+    add.mutate(sent, {
       onSuccess: (set) => {
         close();
         void navigate(`/w/${workshop.id}/p/${production.id}/sets/${set.id}`);

@@ -6,7 +6,7 @@ import {
   type RoomAxis,
   type SetDocument,
 } from '@settlewright/geometry';
-import { useState, type ReactNode } from 'react';
+import { lazy, Suspense, useState, type ReactNode } from 'react';
 import { Button } from '@/components/button.tsx';
 import { MarkTag, timberOf } from '@/components/mark-tag.tsx';
 import type { Choosing } from '../hooks/use-choosing.ts';
@@ -14,6 +14,8 @@ import { AXIS_WORDS, type GroupActions } from '../hooks/use-group-actions.ts';
 import { openHandForm } from '../together/hand-form.ts';
 import { KeepGroup } from '../together/keep-group.tsx';
 import { SharedNumbersDialog } from './shared-numbers-dialog.tsx';
+
+const KeepArrangement = lazy(() => import('../together/keep-arrangement.tsx'));
 
 const EDGES: readonly [AlignEdge, string][] = [
   ['left', 'Left'],
@@ -35,6 +37,7 @@ interface Props {
 /** Several pieces in the hand: which one stays, and what can be done to all. */
 export function ChosenPieces({ document, choosing, actions, onCopy }: Props) {
   const [numbersOpen, setNumbersOpen] = useState(false);
+  const [keeping, setKeeping] = useState(false);
   const { pieces } = choosing;
   const [first] = pieces;
   if (!first) return null;
@@ -112,6 +115,9 @@ export function ChosenPieces({ document, choosing, actions, onCopy }: Props) {
         </Row>
         <Row title="Keep">
           <KeepGroup pieces={pieces} />
+          <Button size="small" onClick={() => setKeeping(true)}>
+            Keep as an arrangement
+          </Button>
           <Button size="small" onClick={() => actions.mark(pieces, 'hidden', !allHidden)}>
             {allHidden ? 'Show' : 'Hide'}
           </Button>
@@ -124,6 +130,11 @@ export function ChosenPieces({ document, choosing, actions, onCopy }: Props) {
         <p className="text-sm text-ink-2">
           Numbers are changed for pieces of one kind: choose those alone, or one piece.
         </p>
+      )}
+      {keeping && (
+        <Suspense fallback={null}>
+          <KeepArrangement pieces={pieces} onClose={() => setKeeping(false)} />
+        </Suspense>
       )}
       {alike && (
         <SharedNumbersDialog pieces={pieces} open={numbersOpen} onClose={() => setNumbersOpen(false)} />

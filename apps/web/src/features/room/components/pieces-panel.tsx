@@ -1,5 +1,13 @@
 import { formatLength, type Piece, type SetDocument } from '@settlewright/geometry';
-import { useMemo, type KeyboardEvent, type MouseEvent, type ReactNode } from 'react';
+import {
+  lazy,
+  Suspense,
+  useMemo,
+  useState,
+  type KeyboardEvent,
+  type MouseEvent,
+  type ReactNode,
+} from 'react';
 import { Button } from '@/components/button.tsx';
 import { classNames } from '@/components/class-names.ts';
 import { MarkTag, timberOf } from '@/components/mark-tag.tsx';
@@ -12,6 +20,8 @@ import { KIND_WORDS, type PieceActions } from '../hooks/use-piece-actions.ts';
 import { useSurroundings } from '../room-context.tsx';
 import { GroupsList } from '../together/groups-list.tsx';
 import { PieceDetails } from './piece-details.tsx';
+
+const PutArrangement = lazy(() => import('../together/put-arrangement.tsx'));
 
 const KINDS = ['bench', 'table', 'loose-seat', 'sill', 'bulkhead', 'overhead'] as const;
 
@@ -42,13 +52,16 @@ export function PiecesPanel({
 }: Props) {
   const choosing = hand?.choosing;
   const { canEdit, style } = useSurroundings();
+  const [puttingIn, setPuttingIn] = useState(false);
   const entries = useMemo(
-    () =>
-      KINDS.map((kind) => ({
+    () => [
+      ...KINDS.map((kind) => ({
         id: kind,
         words: KIND_WORDS[kind].replace(/^./, (letter) => letter.toUpperCase()),
         onPress: () => actions.add(kind),
       })),
+      { id: 'arrangement', words: 'Kept arrangement', onPress: () => setPuttingIn(true) },
+    ],
     [actions],
   );
   const several = (choosing?.pieces.length ?? 0) > 1;
@@ -153,6 +166,11 @@ export function PiecesPanel({
           );
         })}
       </ul>
+      {puttingIn && choosing && (
+        <Suspense fallback={null}>
+          <PutArrangement onChoose={choosing.choose} onClose={() => setPuttingIn(false)} />
+        </Suspense>
+      )}
       {choosing && <GroupsList document={document} choosing={choosing} />}
       {hand?.clipboard.words && (
         <Button look="word" className="mt-2 text-sm" onClick={hand.clipboard.paste}>

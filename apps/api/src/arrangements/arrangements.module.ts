@@ -1,0 +1,12 @@
+import { Module } from '@nestjs/common';
+import { TypeOrmModule } from '@nestjs/typeorm';
+import { ArrangementsController } from './arrangements.controller';
+import { ArrangementsService } from './arrangements.service';
+import { KeptArrangement } from './kept-arrangement.entity';
+
+@Module({
+  imports: [TypeOrmModule.forFeature([KeptArrangement])],
+  controllers: [ArrangementsController],
+  providers: [ArrangementsService],
+})
+export class ArrangementsModule {}
