@@ -113,8 +113,9 @@ function drawClosure(figure: Figure): void {
     });
     if (length < 7 || box.width < 60) continue;
     const inwards = end[0] < box.x + box.width / 2 ? 1 : -1;
+    // Beyond what stands upright along the end.
     taken.write(sheet, 'ends here', [
-      { x: end[0] + inwards * 3, y: end[1] + 1.1, align: inwards > 0 ? 'left' : 'right' },
+      { x: end[0] + inwards * 7, y: end[1] + 1.1, align: inwards > 0 ? 'left' : 'right' },
     ]);
   }
 }
@@ -133,22 +134,33 @@ function drawWall({ sheet, plan, place, at }: Figure, chains: PlanChains): void 
   sheet.text(plan.wall.name, x + (right ? 4.6 : -3.4), place.y + room / 2, { angleDeg: 90, align: 'center' });
 }
 
+/** Words about an edge stay so far off the lines of the outline, mm. */
+const CLEAR_MM = 1.5;
+
+/** Middles for words of a width between two lines: in the middle, else as far off it as they allow. */
+function middles([low, high]: readonly [number, number], width: number, off: readonly number[]): number[] {
+  const middle = (low + high) / 2;
+  const slack = (high - low - width) / 2 - CLEAR_MM;
+  return slack < 0 ? [] : off.filter((by) => Math.abs(by) <= slack).map((by) => middle + by);
+}
+
 /** What each edge is called, beside it on the inside; the longest words that find room. */
 function nameEdges(figure: Figure): void {
   const { sheet, plan, taken } = figure;
   const box = boxOnPaper(figure);
-  const [middleX, middleY] = [box.x + box.width / 2, box.y + box.height / 2];
-  const across = crossings(figure, 'x', middleX);
-  const along = crossings(figure, 'y', middleY);
+  const across = crossings(figure, 'x', box.x + box.width / 2);
+  const along = crossings(figure, 'y', box.y + box.height / 2);
   if (across && across[1] - across[0] >= 14) {
     for (const [edge, y] of [
       ['back', across[0] + 4.4],
       ['front', across[1] - 2],
     ] as const) {
+      const room = crossings(figure, 'y', y - 1.2);
       const whole = plan.closure?.edge === edge ? `${plan.edges[edge]} · ${plan.closure.words}` : '';
-      const places: WordPlace[] = [0, -0.2, 0.2].map((off) => ({ x: middleX + off * box.width, y }));
       for (const words of [whole, plan.edges[edge]]) {
-        if (words === '' || sheet.textWidth(words) > box.width - 12) continue;
+        if (words === '' || !room) continue;
+        const off = [0, -0.1, 0.1, -0.2, 0.2].map((share) => share * box.width);
+        const places = middles(room, sheet.textWidth(words), off).map((x): WordPlace => ({ x, y }));
         if (taken.write(sheet, words, places, { align: 'center' })) break;
       }
     }
@@ -158,8 +170,9 @@ function nameEdges(figure: Figure): void {
     [plan.edges.left, along[0] + 4],
     [plan.edges.right, along[1] - 1.8],
   ] as const) {
-    if (sheet.textWidth(words) > box.height - 9) continue;
-    const places = [0, 3, -3, 6, -6].map((off) => ({ x, y: middleY + off }));
+    const room = crossings(figure, 'x', x - 1.2);
+    if (!room) continue;
+    const places = middles(room, sheet.textWidth(words), [0, 3, -3, 6, -6]).map((y) => ({ x, y }));
     taken.write(sheet, words, places, { angleDeg: 90, align: 'center' });
   }
 }

@@ -40,6 +40,15 @@ describe('a picture from above', () => {
     expect(lengthSeen(bench.at.turnDeg + 180)).toBeGreaterThan(0.8 * lengthSeen(bench.at.turnDeg));
   });
 
+  it('shows a long bench from the front, though more chairs stand opposite', () => {
+    const document = built('banquette');
+    const seats = document.pieces.filter(({ kind }) => kind === 'bench' || kind === 'loose-seat');
+    const bench = seats.find(({ kind }) => kind === 'bench')!;
+    const linesOfBench = (ids: string[]) =>
+      pictureFromAbove(document, new Set(ids)).shapes.filter(({ pieceId }) => pieceId === bench.id).length;
+    expect(linesOfBench(seats.map(({ id }) => id))).toBeGreaterThan(0.8 * linesOfBench([bench.id]));
+  });
+
   it('is empty where nothing is asked for', () => {
     expect(pictureFromAbove(built('bench-window'), new Set()).shapes).toEqual([]);
   });

@@ -1,6 +1,6 @@
 import type { Part, Vec3 } from '../parts/part.ts';
-import { deriveParts } from '../pieces/kinds.ts';
-import type { SetDocument } from '../room/document.ts';
+import { deriveParts, pieceEnvelope } from '../pieces/kinds.ts';
+import type { Piece, SetDocument } from '../room/document.ts';
 import { drawingOf, type Drawing, type DrawShape, type Pen } from './drawing.ts';
 import { seenLinesFrom, type LineKind } from './seen-lines.ts';
 import { pagePoint, type PageFrame } from './set-view.ts';
@@ -48,11 +48,18 @@ export function pictureFromAbove(document: SetDocument, pieceIds: ReadonlySet<st
   return drawingOf([...shapes, ...marks], 40);
 }
 
-/** The turn that shows the front of most pieces. */
+/** The turn that shows most of the fronts, the longest counting most. */
 function bestTurn(pieces: SetDocument['pieces']): number {
   const shown = (turn: number) =>
-    pieces.filter(({ at }) => Math.cos(turn - (at.turnDeg * Math.PI) / 180) > 0.2).length;
+    pieces
+      .filter(({ at }) => Math.cos(turn - (at.turnDeg * Math.PI) / 180) > 0.2)
+      .reduce((sum, piece) => sum + widthOf(piece), 0);
   return TURNS_RAD.reduce((best, turn) => (shown(turn) > shown(best) ? turn : best));
+}
+
+function widthOf(piece: Piece): number {
+  const { minMm, maxMm } = pieceEnvelope(piece);
+  return maxMm[0] - minMm[0];
 }
 
 function middleTop(parts: readonly Part[]): Vec3 {
