@@ -157,6 +157,7 @@ export { endWords } from './measuring/end-words.ts';
 export { measureEnds, type MeasuredLine } from './measuring/measure-ends.ts';
 export { measuringScene, type MeasuringScene } from './measuring/measuring-scene.ts';
 export { endId, endsWords, namedPoints, type NamedPoint } from './measuring/named-points.ts';
+export { refastenDimensions } from './measuring/refasten.ts';
 export { snapEnd } from './measuring/snap-end.ts';
 export * from './views/edit-views.ts';
 export * from './views/lens.ts';

@@ -4,6 +4,7 @@ import {
   type CushionChoice,
   type CushionSpec,
   type PieceOf,
+  refastenDimensions,
 } from '@settlewright/geometry';
 import { useMemo } from 'react';
 import { toast } from 'sonner';
@@ -48,7 +49,9 @@ export function useMaking({ piece, spec, choice, canEdit, actions }: Asked): Mak
       choice,
       canEdit,
       choose: (change, words) => {
-        if (mayChange()) actions.replace(chooseCushion(now(), spec.key, change), `${spec.mark} ${words}`);
+        if (!mayChange()) return;
+        const chosen = chooseCushion(now(), spec.key, change);
+        actions.replace(refastenDimensions(now(), chosen), `${spec.mark} ${words}`);
       },
       changePiece: (change, words) => {
         if (!mayChange()) return;
