@@ -25,6 +25,7 @@ import { RateLimitsModule } from './rate-limits/rate-limits.module';
 import { SetsModule } from './sets/sets.module';
 import { StudiesModule } from './studies/studies.module';
 import { SuggestionsModule } from './suggestions/suggestions.module';
+import { TestSitsModule } from './test-sits/test-sits.module';
 import { UpholsterersModule } from './upholsterers/upholsterers.module';
 import { UsersModule } from './users/users.module';
 import { WorkshopsModule } from './workshops/workshops.module';
@@ -49,6 +50,7 @@ import { WorkshopsModule } from './workshops/workshops.module';
     ProductionsModule,
     CastModule,
     SetsModule,
+    TestSitsModule,
     PopulationsModule,
     StudiesModule,
     SuggestionsModule,

@@ -34,8 +34,8 @@ afterAll(async () => {
   await rm(folder, { recursive: true });
 });
 
-const { statureMm, weightKg, poplitealMm, shoeMm, notes, name } = PRIVATE;
-const MEASURES = [statureMm, weightKg, poplitealMm, shoeMm].map(String);
+const { statureMm, weightKg, poplitealMm, shoeMm, notes, name, sitKg, sitNote } = PRIVATE;
+const MEASURES = [statureMm, weightKg, poplitealMm, shoeMm, sitKg].map(String);
 
 async function pdfText(content: Buffer): Promise<string> {
   const file = join(folder, 'paper.pdf');
@@ -75,7 +75,9 @@ const P = () => fillPath('/workshops/{workshopId}/productions/{productionId}', s
 describe('a measure that is looked for', () => {
   it('is found where it belongs, so that not finding it elsewhere says something', async () => {
     const cast = await get(`${P()}/cast`, shop.people.designer);
-    for (const secret of [...MEASURES, notes, name]) expect(cast.text).toContain(secret);
+    const sits = await get(`${S()}/test-sits`, shop.people.designer);
+    const found = cast.text + sits.text;
+    for (const secret of [...MEASURES, notes, name, sitNote]) expect(found).toContain(secret);
   });
 });
 
@@ -85,7 +87,7 @@ describe.each(['carpenter', 'reviewer'] as const)('the %s', (role) => {
       const answer = await get(fillPath(route.path, shop.parameters), shop.people[role]);
       expect([route.name, answer.status]).toEqual([route.name, 200]);
       const text = await readable(answer);
-      const leaked = [...MEASURES, notes].filter((secret) => text.includes(secret));
+      const leaked = [...MEASURES, notes, sitNote].filter((secret) => text.includes(secret));
       expect([route.name, leaked]).toEqual([route.name, []]);
     }
   });

@@ -34,6 +34,7 @@ export * from './pieces/parameters.ts';
 export { LEAF_WORDS, leavesOfTable, withLeaf, type LeafEdge, type TableLeaf } from './pieces/table-leaves.ts';
 export * from './pieces/place-frames.ts';
 export * from './pieces/bench-layout.ts';
+export { foamSituation, testedOf } from './pieces/foam-situation.ts';
 export { pressedSeatHeightMm, referenceSinkMm } from './pieces/seat-sink.ts';
 export * from './situation/measure-set.ts';
 export * from './situation/suggest-fixes.ts';
@@ -87,6 +88,7 @@ export { TUFTING_WORDS, type TuftingChoice } from './cushions/tufting-choice.ts'
 export { FULLNESS_RULES, type FullnessRule } from './cushions/tufting.ts';
 export * from './cushions/cushion-settings.ts';
 export * from './cushions/foam-grades.ts';
+export { sitsOn, testedBySits, withTested, type KeptSit } from './cushions/tested-by-sits.ts';
 export * from './cushions/workshop-cushions.ts';
 export * from './cushions/wear.ts';
 export { wearHatch, wearRectangle } from './cushions/wear-hatch.ts';

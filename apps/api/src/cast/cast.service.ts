@@ -49,6 +49,18 @@ export class CastService {
     return present(this.people.manager, productionId, castId);
   }
 
+  /** Part of the caller's transaction: the person as they are now, kept from being erased until it ends. */
+  async lockedMember(
+    manager: EntityManager,
+    member: MemberInfo,
+    productionId: string,
+    castId: string,
+  ): Promise<CastMember> {
+    await this.productions.forChanging(member, productionId);
+    await this.productions.lockPeople(manager, productionId);
+    return present(manager, productionId, castId);
+  }
+
   async create(member: MemberInfo, productionId: string, dto: CreateCastMemberDto): Promise<CastMember> {
     await this.productions.forChanging(member, productionId);
     const measured = measuredOf(dto.measured);

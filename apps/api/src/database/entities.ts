@@ -31,6 +31,7 @@ import { Study } from '../studies/entities/study.entity';
 import { StudyBlock } from '../studies/entities/study-block.entity';
 import { DimensionSearch } from '../suggestions/entities/dimension-search.entity';
 import { SearchTries } from '../suggestions/entities/search-tries.entity';
+import { TestSitRow } from '../test-sits/test-sit.entity';
 import { Upholsterer } from '../upholsterers/entities/upholsterer.entity';
 import { User } from '../users/entities/user.entity';
 import { Membership } from '../workshops/entities/membership.entity';
@@ -70,6 +71,7 @@ export const ENTITIES = [
   SetDraft,
   SetNote,
   SetRevision,
+  TestSitRow,
   Study,
   StudyBlock,
   Upholsterer,

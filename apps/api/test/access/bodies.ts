@@ -1,5 +1,5 @@
 import { randomUUID } from 'node:crypto';
-import type { Shop } from '../factories/shop';
+import { type Shop, testSitBody } from '../factories/shop';
 import { surveyBody, surveyCsv } from '../factories/surveys';
 
 const W = '/workshops/{workshopId}';
@@ -32,6 +32,7 @@ export function bodiesFor(shop: Shop): Record<string, object> {
     [`PUT ${S}/draft`]: { baseNumber: shop.draftNumber, document: shop.document },
     [`POST ${S}/revisions`]: { baseNumber: shop.draftNumber, note: '' },
     [`POST ${S}/revisions/{letter}/approval`]: { decision: 'approved', comment: '' },
+    [`POST ${S}/test-sits`]: testSitBody(),
     [`POST ${S}/notes`]: { text: 'Looks right', kind: 'comment' },
     [`PATCH ${S}/notes/{noteId}`]: { resolved: true },
     [`PUT ${S}/built`]: { partId: shop.partId, built: true },

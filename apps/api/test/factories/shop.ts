@@ -15,7 +15,17 @@ export const PRIVATE = {
   weightKg: 83.25,
   poplitealMm: 457.5,
   shoeMm: 31.5,
+  /** Of a test sit. */
+  sitKg: 91.375,
+  sitNote: 'rocked to and fro',
 };
+
+/** Somebody of no cast sat on a foam. */
+export const testSitBody = () => ({
+  name: 'Somebody Heavy',
+  ...{ satOn: '2026-11-03', grade: 'firm seat', ifd25N: 222.4, supportFactor: 2.2, thicknessMm: 95.25 },
+  ...{ weightKg: PRIVATE.sitKg, measuredMm: 21.5, note: PRIVATE.sitNote },
+});
 
 /** A workshop with one of everything, made through its own routes by its owner. */
 export interface Shop {
@@ -72,6 +82,7 @@ export async function createShop(test: TestApp, name: string): Promise<Shop> {
   });
   const note = await make(`${S}/notes`, { text: 'Mind the sill', kind: 'comment' });
   const arrangement = await make(`${W}/arrangements`, { name: 'Booth of four', document: draft.document });
+  const sit = await make(`${S}/test-sits`, testSitBody());
   const email = `upholsterer-${workshopId}@cushions.test`;
   const upholsterer = await make(`${W}/upholsterers`, { name: 'Cushions and Sons', email });
   const order = await make(`${P}/orders`, {
@@ -125,6 +136,7 @@ export async function createShop(test: TestApp, name: string): Promise<Shop> {
       setId: set.id,
       letter: revision.letter,
       noteId: note.id,
+      sitId: sit.id,
       studyId: study.id,
       suggestionId: suggestion.id,
       populationId: population.id,

@@ -805,6 +805,38 @@ export interface paths {
         patch?: never;
         trace?: never;
     };
+    "/api/workshops/{workshopId}/productions/{productionId}/sets/{setId}/test-sits": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        get: operations["TestSits_list"];
+        put?: never;
+        post: operations["TestSits_add"];
+        delete?: never;
+        options?: never;
+        head?: never;
+        patch?: never;
+        trace?: never;
+    };
+    "/api/workshops/{workshopId}/productions/{productionId}/sets/{setId}/test-sits/{sitId}": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        get?: never;
+        put?: never;
+        post?: never;
+        delete: operations["TestSits_remove"];
+        options?: never;
+        head?: never;
+        patch?: never;
+        trace?: never;
+    };
     "/api/workshops/{workshopId}/populations": {
         parameters: {
             query?: never;
@@ -2930,6 +2962,52 @@ export interface components {
             /** @description a sentence for people */
             detail: string;
             fields?: components["schemas"]["ProblemField"][];
+        };
+        TestSitDto: {
+            /** Format: uuid */
+            id: string;
+            /** Format: uuid */
+            castId?: string;
+            /** @description of the cast member as it is now, or as it was typed */
+            name: string;
+            /** Format: date */
+            satOn: string;
+            grade: string;
+            ifd25N: number;
+            supportFactor: number;
+            thicknessMm: number;
+            weightKg: number;
+            /** @description by the estimate alone, whatever other sits say */
+            predictedMm: number;
+            measuredMm: number;
+            note: string;
+        };
+        TestSitPage: {
+            items: components["schemas"]["TestSitDto"][];
+            total: number;
+            page: number;
+            pageSize: number;
+        };
+        AddTestSitDto: {
+            /**
+             * Format: uuid
+             * @description who of the cast sat; else name
+             */
+            castId?: string;
+            /** @description who sat, where it was nobody of the cast */
+            name?: string;
+            /** Format: date */
+            satOn: string;
+            grade: string;
+            /** @description 25 % indentation force deflection, newtons */
+            ifd25N: number;
+            supportFactor: number;
+            thicknessMm: number;
+            /** @description as in the cast, where it is not said */
+            weightKg?: number;
+            /** @description how far the seat went down */
+            measuredMm: number;
+            note?: string;
         };
         /** @enum {string} */
         MeasureKey: "stature" | "weight_kg" | "sitting_height" | "eye_height_sitting" | "acromial_height_sitting" | "elbow_rest_height" | "popliteal_height" | "knee_height_sitting" | "buttock_popliteal_length" | "buttock_knee_length" | "thigh_clearance" | "hip_breadth_sitting" | "hip_breadth" | "bideltoid_breadth" | "forearm_forearm_breadth" | "biacromial_breadth" | "abdominal_extension_depth_sitting" | "chest_depth" | "buttock_depth" | "foot_length" | "foot_breadth" | "acromion_radiale_length" | "shoulder_elbow_length" | "forearm_hand_length" | "thumbtip_reach" | "functional_leg_length" | "head_breadth" | "head_length" | "waist_circumference" | "bicristal_breadth" | "overhead_fingertip_reach_sitting" | "span" | "waist_depth" | "hand_length" | "lateral_malleolus_height" | "trochanterion_height" | "acromial_height" | "chest_circumference" | "buttock_circumference" | "chest_breadth" | "waist_breadth";
@@ -7240,6 +7318,109 @@ export interface operations {
                 content: {
                     "application/json": components["schemas"]["ProblemBody"];
                 };
+            };
+            /** @description what went wrong (RFC 9457) */
+            default: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemBody"];
+                };
+            };
+        };
+    };
+    TestSits_list: {
+        parameters: {
+            query?: {
+                page?: unknown;
+                pageSize?: unknown;
+                sort?: string;
+                order?: "asc" | "desc";
+                search?: string;
+            };
+            header?: never;
+            path: {
+                productionId: string;
+                setId: string;
+            };
+            cookie?: never;
+        };
+        requestBody?: never;
+        responses: {
+            200: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["TestSitPage"];
+                };
+            };
+            /** @description what went wrong (RFC 9457) */
+            default: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemBody"];
+                };
+            };
+        };
+    };
+    TestSits_add: {
+        parameters: {
+            query?: never;
+            header?: never;
+            path: {
+                productionId: string;
+                setId: string;
+            };
+            cookie?: never;
+        };
+        requestBody: {
+            content: {
+                "application/json": components["schemas"]["AddTestSitDto"];
+            };
+        };
+        responses: {
+            201: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["TestSitDto"];
+                };
+            };
+            /** @description what went wrong (RFC 9457) */
+            default: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemBody"];
+                };
+            };
+        };
+    };
+    TestSits_remove: {
+        parameters: {
+            query?: never;
+            header?: never;
+            path: {
+                productionId: string;
+                setId: string;
+                sitId: string;
+            };
+            cookie?: never;
+        };
+        requestBody?: never;
+        responses: {
+            /** @description what it said of a foam stays in the set until it is taken anew */
+            204: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content?: never;
             };
             /** @description what went wrong (RFC 9457) */
             default: {

@@ -41,6 +41,10 @@ export type CastMember = Schema['CastNameDto'] &
     measured?: Partial<Record<TapeMeasureKey, TapeReading>>;
   };
 
+/** Somebody sat on a foam; for owner and designer alone. */
+export type TestSit = Schema['TestSitDto'];
+export type NewTestSit = Schema['AddTestSitDto'];
+
 /** What to measure next of each person who sits in a set of the production. */
 export type MeasureNext = Schema['MeasureNextDto'];
 export type PersonNext = MeasureNext['items'][number];

@@ -1,5 +1,6 @@
 import { REFERENCE_SITTER_KG, seatSinkMm } from '@settlewright/anthropometry';
 import type { PieceOf } from '../room/document.ts';
+import { foamSituation } from './foam-situation.ts';
 
 /** A piece that people sit on. */
 export type SeatPiece = PieceOf<'bench'> | PieceOf<'loose-seat'>;
@@ -12,10 +13,8 @@ export type SeatPiece = PieceOf<'bench'> | PieceOf<'loose-seat'>;
  * @source foam estimator of the anthropometry library
  */
 export function referenceSinkMm(piece: SeatPiece): number {
-  const { thicknessMm, foam } = piece.seatCushion;
-  if (thicknessMm === 0) return 0;
-  const situation = { thicknessMm, ifd25N: foam.ifd25N, supportFactor: foam.supportFactor };
-  return seatSinkMm(situation, REFERENCE_SITTER_KG).sinkMm;
+  const situation = foamSituation(piece.seatCushion);
+  return situation ? seatSinkMm(situation, REFERENCE_SITTER_KG).sinkMm : 0;
 }
 
 /**

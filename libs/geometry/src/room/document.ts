@@ -23,6 +23,24 @@ const foam = z.strictObject({
   /** 25 % indentation force deflection in newtons (ASTM D3574). */
   ifd25N: length(20, 600),
   supportFactor: length(1.2, 4),
+  /** What test sits say of it. Whoever sat, and how heavy they are, is not in the document. */
+  tested: z
+    .strictObject({
+      /** By what the estimate of the drop is multiplied. */
+      factor: length(0.1, 10),
+      /** Half the 90 % range, of the drop. */
+      error: length(0, 1),
+      sits: z.number().int().min(1).max(1000),
+      /** Day of the last sit. */
+      on: z.iso.date(),
+      /** The cushion that was sat on: another firmness or thickness is not tested by it. */
+      of: z.strictObject({
+        thicknessMm: length(1, 250),
+        ifd25N: length(20, 600),
+        supportFactor: length(1.2, 4),
+      }),
+    })
+    .optional(),
 });
 
 const cushion = z.strictObject({ thicknessMm: length(0, 250), foam });

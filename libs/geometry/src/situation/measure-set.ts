@@ -1,5 +1,6 @@
 import type { PlaceSituation, RuleBook, SetSituation } from '@settlewright/anthropometry';
 import { benchLayout } from '../pieces/bench-layout.ts';
+import { foamSituation } from '../pieces/foam-situation.ts';
 import { pressedSeatHeightMm } from '../pieces/seat-sink.ts';
 import type { SetDocument } from '../room/document.ts';
 import { radians } from '../units/angle.ts';
@@ -72,7 +73,6 @@ export function measureSet(
 
 function placeSituation(found: Survey, place: SurveyedPlace): PlaceSituation {
   const { frame, piece } = place;
-  const { thicknessMm, foam } = piece.seatCushion;
   return {
     placeId: frame.placeId,
     pieceId: piece.id,
@@ -81,8 +81,7 @@ function placeSituation(found: Survey, place: SurveyedPlace): PlaceSituation {
     seatTopFrontMm: frame.frontMm[1],
     seatTopHipMm: frame.hipMm[1],
     deckHeightMm: piece.deckHeightMm,
-    foam:
-      thicknessMm > 0 ? { thicknessMm, ifd25N: foam.ifd25N, supportFactor: foam.supportFactor } : undefined,
+    foam: foamSituation(piece.seatCushion),
     effectiveDepthMm: place.effectiveDepthMm,
     widthMm: frame.widthMm,
     heelRoomMm: heelRoom(piece),

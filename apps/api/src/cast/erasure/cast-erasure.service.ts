@@ -5,6 +5,7 @@ import type { MemberInfo } from '../../common/access.decorator';
 import { HeldPapers } from '../../cushion-orders/held-papers.service';
 import { RevisionsService } from '../../sets/revisions.service';
 import { removeFromSearches } from '../../suggestions/search-erasure';
+import { removeTestSits } from '../../test-sits/test-sit-erasure';
 import { CastService } from '../cast.service';
 import { ErasedNames } from './erased-names.service';
 
@@ -25,6 +26,7 @@ export class CastErasureService {
     await this.dataSource.transaction(async (manager) => {
       const { name, newName } = await this.cast.removePersonalData(manager, productionId, castId);
       await this.revisions.removePerson(manager, productionId, { id: castId, name }, newName);
+      await removeTestSits(manager, productionId, { id: castId, name });
       await removeFromSearches(manager, member.workshopId, castId);
       const found = await this.names.remove(manager, member, productionId, { id: castId, name });
       await this.papers.hold(manager, productionId);

@@ -10,6 +10,7 @@ import { productionTexts } from '../../productions/production-texts';
 import { SetTexts } from '../../sets/set-texts.service';
 import { studyTexts } from '../../studies/study-texts';
 import { searchTexts } from '../../suggestions/search-erasure';
+import { testSitTexts } from '../../test-sits/test-sit-erasure';
 import { CastService } from '../cast.service';
 import type { NamedPlaceDto, NamedPlacesDto } from './named-places.dto';
 
@@ -77,6 +78,7 @@ export class ErasedNames {
     yield await productionTexts(manager, productionId);
     yield* await this.cast.textsOfOthers(manager, productionId, castId);
     yield* this.sets.of(manager, member, productionId, options);
+    yield* await testSitTexts(manager, productionId);
     yield* this.orders.of(manager, productionId);
     // Populations belong to the whole workshop, and so do the words that studies and searches copied from them.
     yield* populationTexts(manager, member.workshopId);

@@ -12,6 +12,7 @@ import { LifeOfAnOrder1796201340000 } from './1796201340000-life-of-an-order';
 import { CushionSettings1796202960000 } from './1796202960000-cushion-settings';
 import { ClothsOfAnOrder1796206800000 } from './1796206800000-cloths-of-an-order';
 import { Arrangements1796238000000 } from './1796238000000-arrangements';
+import { TestSits1796240400000 } from './1796240400000-test-sits';
 
 /** In the order in which they run. What is merged is never changed. */
 export const MIGRATIONS: (new () => MigrationInterface)[] = [
@@ -28,4 +29,5 @@ export const MIGRATIONS: (new () => MigrationInterface)[] = [
   CushionSettings1796202960000,
   ClothsOfAnOrder1796206800000,
   Arrangements1796238000000,
+  TestSits1796240400000,
 ];

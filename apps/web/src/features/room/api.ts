@@ -65,9 +65,9 @@ const production = ({ workshopId, productionId }: SetPath): string =>
 export const setAddress = (path: SetPath): string => `${production(path)}/sets/${path.setId}`;
 
 /** Lists that a page shows whole. */
-const LONG_PAGE = { pageSize: 200 };
+export const LONG_PAGE = { pageSize: 200 };
 
-const keyOf = (path: SetPath, ...rest: string[]) => ['set', path.setId, ...rest];
+export const keyOf = (path: SetPath, ...rest: string[]) => ['set', path.setId, ...rest];
 
 export const useSetInfo = (path: SetPath) =>
   useQuery({ queryKey: keyOf(path), queryFn: () => api.get<SetInfo>(setAddress(path)) });
@@ -136,7 +136,7 @@ export const useRevision = (path: SetPath, letter: string | undefined) =>
     staleTime: Infinity,
   });
 
-function useSetMutation<Input, Output>(
+export function useSetMutation<Input, Output>(
   path: SetPath,
   send: (input: Input) => Promise<Output>,
   ...about: string[]

@@ -1,6 +1,8 @@
 import { SINK_ERROR, SOURCE_MARK_WORDS, type Verdict } from '@settlewright/anthropometry';
 import { verdictWord } from '@/components/verdict.tsx';
+import { capital } from '@/lib/capital.ts';
 import { useFormat } from '@/lib/format.ts';
+import { testedWords } from '../test-sits/tested-words.ts';
 import type { FoamEffect, SeatUnder } from './foam-effect.ts';
 
 const VERDICTS: readonly Verdict[] = ['fits', 'tight', 'wontFit', 'notKnown'];
@@ -27,7 +29,7 @@ export function FoamEffectWords({
   differs: boolean;
   isSeat: boolean;
 }) {
-  const { before, after, changes, lightest, heaviest } = effect;
+  const { before, after, changes, tested, lightest, heaviest } = effect;
   return (
     <div className="grid gap-3 text-sm" aria-live="polite">
       {differs && (
@@ -76,9 +78,10 @@ export function FoamEffectWords({
       {isSeat && (
         <>
           <p className="text-ink-2">
-            How far the foam goes down is an estimate, give or take {Math.round(SINK_ERROR.share * 100)} % (
-            {SOURCE_MARK_WORDS[SINK_ERROR.mark]}). Lightest and heaviest of those who sit here
-            {differs ? ', with it' : ''}:
+            {tested
+              ? `${capital(testedWords(tested))}.`
+              : `How far the foam goes down is an estimate, give or take ${Math.round(SINK_ERROR.share * 100)} % (${SOURCE_MARK_WORDS[SINK_ERROR.mark]}).`}{' '}
+            Lightest and heaviest of those who sit here{differs ? ', with it' : ''}:
           </p>
           <ul className="list-disc pl-5">
             <Seat seat={lightest} />

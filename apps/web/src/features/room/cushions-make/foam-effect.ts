@@ -6,7 +6,15 @@ import {
   type SinkBand,
   type Verdict,
 } from '@settlewright/anthropometry';
-import { isLoss, sheetChanges, type Foam, type SetDocument } from '@settlewright/geometry';
+import {
+  foamSituation,
+  isLoss,
+  sheetChanges,
+  testedOf,
+  withTested,
+  type Foam,
+  type SetDocument,
+} from '@settlewright/geometry';
 import { verdictWord } from '@/components/verdict.tsx';
 import { shortName } from '@/lib/short-name.ts';
 import type { RoomPicture } from '../picture.ts';
@@ -24,6 +32,8 @@ export interface FoamEffect {
   before: FitSheet['counts'];
   after: FitSheet['counts'];
   changes: { words: string; worse: boolean }[];
+  /** What test sits say of the foam, if there are any. */
+  tested: Foam['tested'];
   lightest: SeatUnder;
   heaviest: SeatUnder;
 }
@@ -39,7 +49,8 @@ export function withFoam<P extends CushionedPiece>(
     if (piece.kind !== 'bench') return piece;
     return { ...piece, backCushion: { foam, thicknessMm } };
   }
-  return { ...piece, seatCushion: { foam, thicknessMm } };
+  const tested = testedOf({ foam, thicknessMm });
+  return { ...piece, seatCushion: { foam: withTested(foam, tested), thicknessMm } };
 }
 
 /**
@@ -71,6 +82,7 @@ export function foamEffect(
         worse: isLoss(change),
       };
     }),
+    tested: testedOf(pieces.piece.seatCushion),
     lightest: seatUnder(pieces.piece, sitting[0] ?? reference),
     heaviest: seatUnder(pieces.piece, sitting.at(-1) ?? reference),
   };
@@ -84,12 +96,9 @@ const stateWord = (state: Verdict | 'inside' | 'outside' | 'gone'): string =>
       : verdictWord(state);
 
 function seatUnder(piece: CushionedPiece, { name, weightKg }: { name: string; weightKg: number }): SeatUnder {
-  const { thicknessMm, foam } = piece.seatCushion;
-  const top = piece.deckHeightMm + thicknessMm;
-  if (thicknessMm <= 0) {
-    return { name, heightMm: { low: top, best: top, high: top }, bottomsOut: 'no' };
-  }
-  const { ifd25N, supportFactor } = foam;
-  const { lowMm, bestMm, highMm, bottomsOut } = sinkBand({ thicknessMm, ifd25N, supportFactor }, weightKg);
+  const top = piece.deckHeightMm + piece.seatCushion.thicknessMm;
+  const foam = foamSituation(piece.seatCushion);
+  if (!foam) return { name, heightMm: { low: top, best: top, high: top }, bottomsOut: 'no' };
+  const { lowMm, bestMm, highMm, bottomsOut } = sinkBand(foam, weightKg);
   return { name, heightMm: { low: top - highMm, best: top - bestMm, high: top - lowMm }, bottomsOut };
 }

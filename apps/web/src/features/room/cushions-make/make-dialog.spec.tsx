@@ -5,7 +5,8 @@ import summary from '@settlewright/seed-data/populations/ansur2.json';
 import { screen, within } from '@testing-library/react';
 import userEvent from '@testing-library/user-event';
 import { http, HttpResponse } from 'msw';
-import { describe, expect, it } from 'vitest';
+import { beforeEach, describe, expect, it } from 'vitest';
+import type { NewTestSit, TestSit } from '@/lib/contract.ts';
 import { renderPage, signInAs, WORKSHOP_ID } from '@/test/render-page.tsx';
 import { server } from '@/test/server.ts';
 import { usePieceActions } from '../hooks/use-piece-actions.ts';
@@ -30,13 +31,15 @@ const seated: SetDocument = {
   })),
 };
 
+const CAST = [{ id: 'c1', name: 'Ottilie Brandt', role: '', colour: 1, weightKg: 77 }];
+
 function Row() {
   const piece = useRoom((state) => state.document.pieces.find(({ id }) => id === 'b1')!);
   const actions = usePieceActions(() => {});
   return <CushionsButton piece={piece} actions={actions} />;
 }
 
-async function open(canEdit = true): Promise<RoomStore> {
+async function open(canEdit = true, detail: RoomSurroundings['detail'] = 'full'): Promise<RoomStore> {
   signInAs('designer');
   const kept = { number: 0, settings: { allowancesMm: {}, foams: [] }, changedAt: null, changedByName: null };
   server.use(http.get('*/api/workshops/:id/cushion-settings', () => HttpResponse.json(kept)));
@@ -45,9 +48,9 @@ async function open(canEdit = true): Promise<RoomStore> {
     path: { workshopId: WORKSHOP_ID, productionId: 'p', setId: 's' },
     setName: 'Dining car',
     canEdit,
-    detail: 'full',
+    detail,
     style: { system: 'feet-inches', roundTo: 8 },
-    cast: [],
+    cast: CAST,
     engine,
     maker,
   };
@@ -166,5 +169,91 @@ describe('another foam', () => {
     }
     expect(is.heaviest.heightMm.best).toBeLessThan(is.lightest.heightMm.best);
     expect(changed.deckHeightMm).toBe(piece.deckHeightMm);
+  });
+});
+
+describe('test sits', () => {
+  const seatOf = (store: RoomStore) => {
+    const bench = store.getState().document.pieces.find(({ id }) => id === 'b1');
+    if (bench?.kind !== 'bench') throw new Error('no bench');
+    return bench.seatCushion;
+  };
+  const sits: TestSit[] = [];
+  const sent: NewTestSit[] = [];
+  beforeEach(() => {
+    sits.length = 0;
+    sent.length = 0;
+    server.use(
+      http.get('*/sets/s/test-sits', () => HttpResponse.json({ items: sits, total: sits.length })),
+      http.post('*/sets/s/test-sits', async ({ request }) => {
+        const body = (await request.json()) as NewTestSit;
+        sent.push(body);
+        const { note = '', weightKg = 77 } = body;
+        const kept = { ...body, note, weightKg, id: `sit-${sits.length}`, name: 'Ottilie Brandt' };
+        sits.push({ ...kept, predictedMm: 16 });
+        return HttpResponse.json(sits.at(-1), { status: 201 });
+      }),
+      http.delete('*/sets/s/test-sits/:id', ({ params }) => {
+        sits.splice(0, sits.length, ...sits.filter(({ id }) => id !== params.id));
+        return new HttpResponse(null, { status: 204 });
+      }),
+    );
+  });
+  const show = async (canEdit?: boolean, detail?: RoomSurroundings['detail']) => {
+    const store = await open(canEdit, detail);
+    await userEvent.click(screen.getByRole('button', { name: 'Test sits' }));
+    return store;
+  };
+
+  it('are kept by keyboard, counted with by one undoable step, and taken out', async () => {
+    const store = await show();
+    const user = userEvent.setup();
+    expect(await screen.findByText(/No test sits are kept/)).toBeVisible();
+    await pick(/^Who sat,/, 'Ottilie Brandt');
+    await user.type(screen.getByLabelText('It went down'), '1{Enter}');
+    expect(await screen.findByRole('table', { name: 'Test sits of this set' })).toHaveTextContent(
+      'Ottilie Brandt',
+    );
+    expect(sent).toMatchObject([{ castId: 'c1', grade: 'firm seat', thicknessMm: 95.25, measuredMm: 25.4 }]);
+    expect(sent[0]).not.toHaveProperty('weightKg');
+    await user.click(await screen.findByRole('button', { name: 'Count with it' }));
+    const { tested } = seatOf(store).foam;
+    expect(tested).toMatchObject({ sits: 1, on: sent[0]?.satOn, of: { thicknessMm: 95.25 } });
+    expect(tested!.factor).toBeGreaterThan(1);
+    expect(JSON.stringify(store.getState().document)).not.toMatch(/weightKg|Ottilie/);
+    expect(undoNames(store).undo).toBe('B1 seat foam by one test sit');
+    expect(screen.getByText(/^The set counts with it: by one test sit/)).toBeVisible();
+    store.temporal.getState().undo();
+    expect(seatOf(store).foam.tested).toBeUndefined();
+    await user.click(await screen.findByRole('button', { name: /^Take the sit of Ottilie Brandt/ }));
+    expect(await screen.findByText(/No test sits are kept/)).toBeVisible();
+  });
+
+  it('say what is missing before anything is sent', async () => {
+    await show();
+    await screen.findByText(/No test sits are kept/);
+    await userEvent.click(screen.getByRole('button', { name: 'Keep this sit' }));
+    for (const words of ['Who sat?', 'How heavy?', 'How far did it go down?']) {
+      expect(screen.getByText(words)).toBeVisible();
+    }
+    expect(sent).toEqual([]);
+  });
+
+  it('are no longer counted with once another foam or thickness is taken', async () => {
+    const store = await show();
+    await pick(/^Who sat,/, 'Ottilie Brandt');
+    await userEvent.type(screen.getByLabelText('It went down'), '1{Enter}');
+    await userEvent.click(await screen.findByRole('button', { name: 'Count with it' }));
+    await userEvent.click(screen.getByRole('button', { name: /^Foam, and what another/ }));
+    await pick(/^Try another foam,/, /^quick-dry outdoors/);
+    await userEvent.click(screen.getByRole('button', { name: 'Take it' }));
+    expect(seatOf(store).foam).not.toHaveProperty('tested');
+  });
+
+  it('are told to readers without measures by the factor alone', async () => {
+    await show(false, 'verdicts');
+    expect(screen.getByText(/^The set counts with the estimate/)).toBeVisible();
+    expect(screen.queryByText(/No test sits are kept/)).toBeNull();
+    expect(screen.queryByRole('form')).toBeNull();
   });
 });

@@ -10,6 +10,7 @@ import { useFormat } from '@/lib/format.ts';
 import type { PieceActions } from '../hooks/use-piece-actions.ts';
 import { useSurroundings } from '../room-context.tsx';
 import { useRoom } from '../store.ts';
+import { TestSits } from '../test-sits/test-sits.tsx';
 import { FoamFields } from './foam-fields.tsx';
 import { JointsFields } from './joints-fields.tsx';
 import { MakeFields } from './make-fields.tsx';
@@ -96,6 +97,11 @@ export default function MakeDialog({ piece: opened, actions, onClose }: MakeDial
             <Disclosure words="Foam, and what another would do">
               <FoamFields making={making} foams={rules.foams} />
             </Disclosure>
+            {spec.kind === 'seat' && (
+              <Disclosure words="Test sits">
+                <TestSits making={making} />
+              </Disclosure>
+            )}
           </div>
         </div>
       )}
