@@ -56,7 +56,7 @@ describe('what elbows and knees sweep', () => {
     expect(envelopeGap(elbow, [wallAt(out + 30)], 500)!.distanceMm).toBeCloseTo(30, 1);
     const missing = envelopeGap(elbow, [wallAt(out - 40)], 500)!;
     expect(missing.distanceMm).toBeLessThan(-15);
-    expect(missing.partId).toBe('w/wall-board-1');
+    expect(missing.thing.partId).toBe('w/wall-board-1');
     expect(envelopeGap(elbow, [wallAt(out + 900)], 500)).toBeUndefined();
   });
 
@@ -68,6 +68,41 @@ describe('what elbows and knees sweep', () => {
     expect(deepest).toBeLessThan(envelopeGap(elbow, [little], 500)!.distanceMm - 1);
     expect(envelopeGap(elbow, [little, much], 500)!.distanceMm).toBeCloseTo(deepest, 3);
     expect(envelopeGap(elbow, [much, little], 500)!.distanceMm).toBeCloseTo(deepest, 3);
+  });
+
+  it('finds the room inside a hollow part', () => {
+    const elbow = of('elbow', 'left');
+    const [x, y, z] = elbow.centresMm[0]!;
+    const [inside, wall] = [elbow.radiusMm + 400, 20];
+    const outside = inside + wall;
+    const bay: Part = {
+      id: 'bay',
+      pieceId: 'w',
+      role: 'wall-board',
+      material: 'wall',
+      positionMm: [x, y, z],
+      rotationRad: [0, 0, 0],
+      // A bay of three walls round the elbow, open to the right; its hull would hold the elbow.
+      solid: {
+        shape: 'prism',
+        isPanel: true,
+        depthMm: 2000,
+        outlineMm: [
+          [-outside, -outside],
+          [outside, -outside],
+          [outside, outside],
+          [-outside, outside],
+          [-outside, inside],
+          [inside, inside],
+          [inside, -inside],
+          [-outside, -inside],
+        ],
+      },
+    };
+    const gap = envelopeGap(elbow, [bay], 2000)!;
+    const furthest = Math.max(...elbow.centresMm.map((centre) => centre[0]));
+    expect(gap.distanceMm).toBeGreaterThan(0);
+    expect(gap.distanceMm).toBeLessThanOrEqual(x + inside - furthest - elbow.radiusMm + 0.5);
   });
 });
 

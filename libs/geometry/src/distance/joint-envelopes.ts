@@ -13,9 +13,11 @@ import {
 } from '../mannequin/stance.ts';
 import { add, length, scale, sub, turnAboutX, turnAboutY } from '../mannequin/vector.ts';
 import type { Part, Vec3 } from '../parts/part.ts';
-import { gapBetween, type Gap } from './gap.ts';
+import type { Gap } from './gap.ts';
 import { hullOfBalls, type Shape } from './shape.ts';
-import { partShape } from './solids.ts';
+import type { Thing } from './sitter-gap.ts';
+import { partSurface } from './solids.ts';
+import { solidSurface, surfaceGap } from './surface.ts';
 
 /** The room that one elbow or knee needs while its limb moves. */
 export interface JointEnvelope {
@@ -30,10 +32,9 @@ export interface JointEnvelope {
   shape: Shape;
 }
 
-/** The smallest gap of an envelope. */
+/** The smallest gap of an envelope, and the part it is to. */
 export interface EnvelopeGap extends Gap {
-  partId: string;
-  pieceId: string;
+  thing: Extract<Thing, { kind: 'part' }>;
 }
 
 const STEPS = 4;
@@ -89,7 +90,7 @@ export function jointEnvelopes(pose: MannequinPose, { sweeps }: JointRanges): Jo
 }
 
 /**
- * The smallest gap between an envelope and the parts of a set.
+ * The smallest gap between an envelope and the parts of a set, hollow ones as they are.
  *
  * @param envelope - from `jointEnvelopes`
  * @param parts - parts to keep clear of
@@ -101,11 +102,13 @@ export function envelopeGap(
   parts: readonly Part[],
   atMostMm: number,
 ): EnvelopeGap | undefined {
+  const swept = solidSurface(envelope.shape);
   let best: EnvelopeGap | undefined;
   for (const part of parts) {
-    const gap = gapBetween(envelope.shape, partShape(part), best?.distanceMm ?? atMostMm);
+    const gap = surfaceGap(swept, partSurface(part), best ? Math.max(0, best.distanceMm) : atMostMm);
     if (gap && (!best || gap.distanceMm < best.distanceMm)) {
-      best = { ...gap, partId: part.id, pieceId: part.pieceId };
+      const { id: partId, pieceId, role } = part;
+      best = { ...gap, thing: { kind: 'part', partId, pieceId, role } };
     }
   }
   return best;

@@ -15,7 +15,7 @@ import { solidSurface, surfaceGap, type Surface } from './surface.ts';
 /** Gaps wider than this are in nobody's way. */
 const REACH_MM = 1500;
 /** What a sitter rests on by sitting there. */
-const SEAT_ROLES: readonly PartRole[] = [
+export const SEAT_ROLES: readonly PartRole[] = [
   'seat-cushion',
   'back-cushion',
   'seat',

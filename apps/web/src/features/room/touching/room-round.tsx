@@ -1,17 +1,30 @@
 import {
+  envelopeGap,
   jointEnvelopes,
+  SEAT_ROLES,
+  type JointEnvelope,
   readJointRanges,
   type SitterDistances,
   type SitterGap,
 } from '@settlewright/geometry';
 import jointFile from '@settlewright/seed-data/joint-ranges.json';
-import { useEffect, useState } from 'react';
+import { useEffect, useMemo, useState } from 'react';
 import { Toggle } from '../components/toggle.tsx';
 import type { RoomPicture } from '../picture.ts';
 import { choosePlace } from '../posture/chosen-place.ts';
 import { useSurroundings } from '../room-context.tsx';
 import { hideGaps, showGaps } from './shown-gaps.ts';
-import { isMeant, meetings, sayGap, sayRests, sayThing, sayTouches, type Meeting } from './touch-words.ts';
+import {
+  isMeant,
+  meetings,
+  sayGap,
+  sayRests,
+  saySwept,
+  sayThing,
+  sayTouches,
+  SWEPT_WITHIN_MM,
+  type Meeting,
+} from './touch-words.ts';
 import { useDistances } from './use-distances.ts';
 
 const RANGES = readJointRanges(jointFile);
@@ -35,10 +48,8 @@ export function RoomRound({ picture, placeId }: Props) {
   );
   useEffect(() => hideGaps, []);
   const pose = picture.bodies.find((body) => body.placeId === placeId)?.pose;
-  useEffect(
-    () => showGaps({ envelopes: envelopes && pose ? jointEnvelopes(pose, RANGES) : [] }),
-    [envelopes, pose],
-  );
+  const swept = useMemo(() => (envelopes && pose ? jointEnvelopes(pose, RANGES) : []), [envelopes, pose]);
+  useEffect(() => showGaps({ envelopes: swept }), [swept]);
   return (
     <div>
       <h3 className="font-semibold">Room round each sitter</h3>
@@ -52,6 +63,13 @@ export function RoomRound({ picture, placeId }: Props) {
       <Toggle on={envelopes} onChange={setEnvelopes}>
         What elbows and knees sweep
       </Toggle>
+      <ul>
+        {swept.map((envelope) => (
+          <li key={`${envelope.side} ${envelope.joint}`}>
+            {saySwept(envelope, sweptGap(envelope, picture, placeId), picture, style)}
+          </li>
+        ))}
+      </ul>
       {envelopes &&
         RANGES.sweeps.map(({ joint, words, source }) => (
           <p key={joint} className="text-ink-3">
@@ -65,6 +83,13 @@ export function RoomRound({ picture, placeId }: Props) {
       </p>
     </div>
   );
+}
+
+/** How near an elbow or knee comes to a part while it moves; the seat and back it rests on are left out. */
+function sweptGap(envelope: JointEnvelope, { bodies, parts }: RoomPicture, placeId: string) {
+  const own = bodies.find((body) => body.placeId === placeId)?.pieceId;
+  const others = parts.filter(({ pieceId, role }) => pieceId !== own || !SEAT_ROLES.includes(role));
+  return envelopeGap(envelope, others, SWEPT_WITHIN_MM);
 }
 
 /** What a sitter reaches into and does not rest on. */

@@ -1,7 +1,7 @@
 import { addPiece, emptySetDocument, type SitterGap } from '@settlewright/geometry';
 import { expect, it } from 'vitest';
 import { outlineOf } from './outline.ts';
-import { isMeant, meetings, sayGap } from './touch-words.ts';
+import { isMeant, meetings, sayGap, saySwept } from './touch-words.ts';
 
 const { document, pieceId } = addPiece(emptySetDocument(), 'table');
 const named = { document, bodies: [{ placeId: 'b1:2', name: 'Hetty Vance' }] };
@@ -70,4 +70,14 @@ it('names each thing once, with the deepest stretch first and the others behind 
     [-9, ['left thigh']],
     [-6, []],
   ]);
+});
+
+it('says how much room an elbow or knee has while it moves', () => {
+  const style = { system: 'millimetres', roundTo: 8 } as const;
+  const swept = { joint: 'elbow', side: 'left' } as const;
+  const thing = { kind: 'part', partId: 't/top-1', pieceId, role: 'top' } as const;
+  const at = (distanceMm: number) => ({ ...gap({}), distanceMm, thing });
+  expect(saySwept(swept, at(38), named, style)).toBe('Left elbow: 38\u202fmm to T1 top');
+  expect(saySwept(swept, at(-12), named, style)).toBe('Left elbow: T1 top in its way by 12\u202fmm');
+  expect(saySwept(swept, undefined, named, style)).toContain('free');
 });

@@ -1,6 +1,8 @@
 import {
   CONTACT_MM,
   formatLength,
+  type EnvelopeGap,
+  type JointEnvelope,
   type LengthStyle,
   type Part,
   type SetDocument,
@@ -48,6 +50,23 @@ export function sayGap(gap: SitterGap, named: Named, style: LengthStyle): string
   const how = gap.measuredOn === 'skin' ? 'on the skin' : 'on solids';
   if (Math.abs(gap.distanceMm) <= CONTACT_MM) return `${to} touch, ${how}`;
   return gap.distanceMm < 0 ? `${to} overlap by ${size}, ${how}` : `${size} between ${to}, ${how}`;
+}
+
+/** How far off something has a word to say of what elbows and knees sweep, mm. */
+export const SWEPT_WITHIN_MM = 300;
+
+/** "Left elbow: 4″ to W1 wall board", or what is in its way. */
+export function saySwept(
+  { joint, side }: Pick<JointEnvelope, 'joint' | 'side'>,
+  gap: EnvelopeGap | undefined,
+  named: Named,
+  style: LengthStyle,
+): string {
+  const limb = `${side === 'left' ? 'Left' : 'Right'} ${joint}`;
+  if (!gap) return `${limb}: free, nothing within ${formatLength(SWEPT_WITHIN_MM, style)}`;
+  const size = formatLength(Math.abs(gap.distanceMm), style);
+  const thing = sayThing(gap, named);
+  return gap.distanceMm < 0 ? `${limb}: ${thing} in its way by ${size}` : `${limb}: ${size} to ${thing}`;
 }
 
 /** One thing that a body meets: the deepest gap, and what else of the body meets it. */
