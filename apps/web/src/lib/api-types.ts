@@ -2935,6 +2935,8 @@ export interface components {
                 pull?: number;
                 /** @description how far a button without fullness is pulled in; 9.524999999999999 mm as usual */
                 buttonPull?: number;
+                /** @description lost of each inch of wrap under a sitter; 12.7 mm as usual */
+                wrapLost?: number;
                 /** @description least distance of a button from the edge; 101.6 mm as usual */
                 buttonToEdge?: number;
             };

@@ -45,4 +45,34 @@ describe('seatSinkMm', () => {
     expect(sink.bottomsOut).toBe(true);
     expect(sink.strain).toBe(0.65);
   });
+
+  describe('of several layers', () => {
+    const inches = (pounds: number, change: object) =>
+      seatSinkMm({ ...foam(36, 2), ...change }, pounds * LB).sinkMm / IN;
+    const layer = (share: number, pounds: number) => ({ share, ifd25N: pounds * LBF });
+
+    it('is as of one where the layers are of one firmness', () => {
+      expect(inches(170, { layers: [layer(0.25, 36), layer(0.75, 36)] })).toBeCloseTo(1.28, 2);
+    });
+
+    // Two of the vectors above, half of each: springs one on another bear the same load.
+    it.each([
+      [200, 36, 30, (1.61 + 2.05) / 2],
+      [200, 30, 36, (1.61 + 2.05) / 2],
+    ])('%d lb on IFD %d over %d adds up half of each', (pounds, top, bottom, sinkIn) => {
+      expect(inches(pounds, { layers: [layer(0.5, top), layer(0.5, bottom)] })).toBeCloseTo(sinkIn, 2);
+    });
+
+    it('bottoms out with the softest', () => {
+      const layers = [layer(0.25, 10), layer(0.75, 60)];
+      expect(seatSinkMm({ ...foam(36, 2), layers }, 170 * LB).bottomsOut).toBe(true);
+      expect(seatSinkMm({ ...foam(36, 2), layers: layers.slice(1) }, 170 * LB).bottomsOut).toBe(false);
+    });
+  });
+
+  it('loses half of a wrap, and the foam is thinner by the wrap', () => {
+    // 4 in of foam under 1 in of wrap, by the vector of 170 lb.
+    const wrapped = { ...foam(36, 2, 5), wrap: { share: 0.2, lost: 0.5 } };
+    expect(seatSinkMm(wrapped, 170 * LB).sinkMm / IN).toBeCloseTo(1.28 + 0.5, 2);
+  });
 });

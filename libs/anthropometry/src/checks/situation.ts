@@ -14,6 +14,22 @@ export interface SinkCalibration {
   sits: number;
 }
 
+/** One layer of a laminated foam. */
+export interface FoamLayer {
+  /** Of the foam's thickness, wrap apart; all layers together 1. */
+  share: number;
+  /** 25 % indentation force deflection, newtons. */
+  ifd25N: number;
+}
+
+/** Polyester round the foam, both faces together. */
+export interface FoamWrap {
+  /** Of the cushion's thickness, 0 to 1. */
+  share: number;
+  /** Part of it that is lost under anybody who sits, 0 to 1. */
+  lost: number;
+}
+
 /** Foam under the sitter, as its maker states it. */
 export interface FoamSituation {
   thicknessMm: number;
@@ -21,6 +37,10 @@ export interface FoamSituation {
   ifd25N: number;
   /** 65 % IFD over 25 % IFD. */
   supportFactor: number;
+  /** From the top down, where it is made of several; then `ifd25N` is that of the whole and is not read. */
+  layers?: readonly FoamLayer[] | undefined;
+  /** Soft wrap inside the cushion's thickness; absent where there is none. */
+  wrap?: FoamWrap | undefined;
   /** From test sits on it; absent where nobody tried it. */
   tested?: SinkCalibration | undefined;
 }

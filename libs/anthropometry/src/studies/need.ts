@@ -46,8 +46,11 @@ const DIGITS = 12;
 const NOTHING = 1e-12;
 
 /** The same for foams under which people sink alike. */
-export const foamName = ({ ifd25N, supportFactor, tested }: Firmness): string =>
-  `${ifd25N}/${supportFactor}${tested ? `*${tested.factor}` : ''}`;
+export function foamName({ ifd25N, supportFactor, layers, wrap, tested }: Firmness): string {
+  const whole = layers ? layers.map(({ share, ifd25N: own }) => `${share}x${own}`).join('+') : ifd25N;
+  const soft = wrap ? `,${wrap.share}x${wrap.lost}` : '';
+  return `${whole}/${supportFactor}${soft}${tested ? `*${tested.factor}` : ''}`;
+}
 
 /**
  * Splits a line into what bodies need and what the set offers.

@@ -37,6 +37,7 @@ export const CUSHION_SETTINGS = {
   boardFoamOver: inches(3 / 8, 'foam larger than its board, on every side', 'published source'),
   pull: inches(5 / 2, 'cover pulled round and stapled under the board', 'published source'),
   buttonPull: inches(3 / 8, 'how far a button without fullness is pulled in', 'from memory'),
+  wrapLost: inches(1 / 2, 'lost of each inch of wrap under a sitter', 'from memory'),
   buttonToEdge: inches(4, 'least distance of a button from the edge', 'from memory'),
 } as const satisfies Record<string, CushionSetting>;
 

@@ -1,4 +1,5 @@
 import { z } from 'zod';
+import type { Foam } from '../room/document.ts';
 import { KG_M3_PER_LB_FT3, NEWTON_PER_LBF } from '../units/foam-units.ts';
 import { MM_PER_INCH } from '../units/length-style.ts';
 import type { SettingSource } from './cushion-settings.ts';
@@ -58,3 +59,25 @@ export const FOAM_PRESETS: readonly (FoamGrade & { source: SettingSource })[] = 
   preset('kneeler', 'either', [2.8, 65, 2.4, 1.5]),
   preset('soft back', 'back', [1.8, 25, 2, 2]),
 ];
+
+/** Wraps thinner than this are not counted, millimetres. */
+const LEAST_WRAP_MM = 1;
+
+/**
+ * A grade as a piece has it: with its layers as shares of the foam, and with its wrap.
+ *
+ * @param grade - as the workshop buys it
+ * @param wrapLostMm - lost of each inch of wrap under a sitter, millimetres
+ * @returns foam of a set document
+ */
+export function foamOfGrade(grade: FoamGrade, wrapLostMm: number): Foam {
+  const { name, densityKgM3, ifd25N, supportFactor, layers, wrapMm } = grade;
+  const whole = layers.reduce((sum, { thicknessMm }) => sum + thicknessMm, 0);
+  const shares = layers.map((layer) => ({ share: layer.thicknessMm / whole, times: layer.ifd25N / ifd25N }));
+  const lostMm = (wrapMm * wrapLostMm) / MM_PER_INCH;
+  return {
+    ...{ grade: name, densityKgM3, ifd25N, supportFactor },
+    ...(layers.length > 1 ? { layers: shares } : {}),
+    ...(wrapMm >= LEAST_WRAP_MM ? { wrap: { thicknessMm: wrapMm, lostMm } } : {}),
+  };
+}

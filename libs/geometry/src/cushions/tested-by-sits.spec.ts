@@ -1,5 +1,6 @@
 import { SINK_ERROR } from '@settlewright/anthropometry';
 import { describe, expect, it } from 'vitest';
+import { foamSituation } from '../pieces/foam-situation.ts';
 import { referenceSinkMm } from '../pieces/seat-sink.ts';
 import { setParameter } from '../pieces/parameters.ts';
 import { ARRANGEMENTS } from '../room/arrangements.ts';
@@ -71,6 +72,15 @@ describe('what test sits say of a cushion', () => {
     expect(sitsOn(CUSHION, [...others, first])).toEqual([first]);
     expect(testedBySits(CUSHION, others)).toBeUndefined();
     expect(JSON.stringify(testedBySits(CUSHION, sits(1.3)))).not.toMatch(/weight|measured/i);
+  });
+
+  it('says nothing of a foam in layers or with a wrap', () => {
+    const wrapped = { ...CUSHION, foam: { ...FOAM, wrap: { thicknessMm: 25, lostMm: 12.5 } } };
+    expect(testedBySits(wrapped, sits(1.3))).toBeUndefined();
+    const tested = testedBySits(CUSHION, sits(1.3));
+    expect(foamSituation({ ...wrapped, foam: withTested(wrapped.foam, tested) })).not.toHaveProperty(
+      'tested',
+    );
   });
 
   it('moves the seat, and is read back with the set', () => {

@@ -17,7 +17,7 @@ export interface KeptSit {
 const SAME = 1e-6;
 
 /**
- * Sits on just such a cushion: grade, firmness and thickness.
+ * Sits on just such a cushion: grade, firmness and thickness. A sit is kept for a plain foam, without layers or wrap.
  *
  * @param cushion - thickness in millimetres and foam
  * @param sits - any; millimetres, newtons, kilograms
@@ -29,6 +29,8 @@ export const sitsOn = <Sit extends KeptSit>(
 ): Sit[] =>
   sits.filter(
     (sit) =>
+      !foam.layers &&
+      !foam.wrap &&
       sit.grade === foam.grade &&
       Math.abs(sit.thicknessMm - thicknessMm) < SAME &&
       Math.abs(sit.ifd25N - foam.ifd25N) < SAME &&

@@ -1,4 +1,5 @@
 import { z } from 'zod';
+import { MM_PER_INCH } from '../units/length-style.ts';
 import { CUSHION_SETTINGS, type CushionSettings } from './cushion-settings.ts';
 import { foamGradeSchema, type FoamGrade } from './foam-grades.ts';
 
@@ -12,6 +13,7 @@ const LIMITS: Partial<Record<AllowanceKey, readonly [number, number]>> = {
   clothWidth: [300, 3500],
   weltStrip: [10, 150],
   seam: [3, 60],
+  wrapLost: [0, MM_PER_INCH],
 };
 
 /**

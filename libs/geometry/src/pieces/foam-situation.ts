@@ -19,6 +19,8 @@ const SAME = 1e-6;
 export function testedOf({ thicknessMm, foam }: FoamCushion): Foam['tested'] {
   const { tested } = foam;
   if (!tested) return undefined;
+  // A sit is kept for a plain foam alone.
+  if (foam.layers || foam.wrap) return undefined;
   const { of } = tested;
   const same =
     Math.abs(of.thicknessMm - thicknessMm) < SAME &&
@@ -31,14 +33,25 @@ export function testedOf({ thicknessMm, foam }: FoamCushion): Foam['tested'] {
  * A seat cushion as the checks read it.
  *
  * @param cushion - thickness in millimetres and foam
- * @returns thickness in millimetres, 25 % IFD in newtons, with what test sits say; `undefined` for a hard seat
+ * @returns thickness in millimetres, 25 % IFD in newtons, layers and wrap as shares, with what test sits say; `undefined` for a hard seat
  */
 export function foamSituation(cushion: FoamCushion): FoamSituation | undefined {
   const { thicknessMm, foam } = cushion;
   if (thicknessMm <= 0) return undefined;
-  const { ifd25N, supportFactor } = foam;
+  const { ifd25N, supportFactor, layers, wrap } = foam;
   const tested = testedOf(cushion);
-  if (!tested) return { thicknessMm, ifd25N, supportFactor };
-  const { factor, error, sits } = tested;
-  return { thicknessMm, ifd25N, supportFactor, tested: { factor, error, sits } };
+  const situation: FoamSituation = { thicknessMm, ifd25N, supportFactor };
+  if (layers) {
+    const whole = layers.reduce((sum, { share }) => sum + share, 0);
+    situation.layers = layers.map(({ share, times }) => ({ share: share / whole, ifd25N: times * ifd25N }));
+  }
+  if (wrap) {
+    const share = Math.min(1, wrap.thicknessMm / thicknessMm);
+    situation.wrap = { share, lost: Math.min(1, wrap.lostMm / wrap.thicknessMm) };
+  }
+  if (tested) {
+    const { factor, error, sits } = tested;
+    situation.tested = { factor, error, sits };
+  }
+  return situation;
 }

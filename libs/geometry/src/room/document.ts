@@ -23,6 +23,14 @@ const foam = z.strictObject({
   /** 25 % indentation force deflection in newtons (ASTM D3574). */
   ifd25N: length(20, 600),
   supportFactor: length(1.2, 4),
+  /** From the top down, where it is laminated: its share of the foam's thickness, and its firmness as times that of the whole. */
+  layers: z
+    .array(z.strictObject({ share: length(0.01, 1), times: length(0.03, 30) }))
+    .min(2)
+    .max(4)
+    .optional(),
+  /** Polyester round it, inside the cushion's thickness, and how much of that is lost under a sitter. */
+  wrap: z.strictObject({ thicknessMm: length(1, 60), lostMm: length(0, 60) }).optional(),
   /** What test sits say of it. Whoever sat, and how heavy they are, is not in the document. */
   tested: z
     .strictObject({

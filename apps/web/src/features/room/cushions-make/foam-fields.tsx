@@ -1,4 +1,4 @@
-import { FOAM_PRESETS, foamText, type FoamGrade } from '@settlewright/geometry';
+import { FOAM_PRESETS, foamOfGrade, foamText, type FoamGrade } from '@settlewright/geometry';
 import { useMemo, useState } from 'react';
 import { Button } from '@/components/button.tsx';
 import { LengthField } from '@/components/length-field.tsx';
@@ -14,7 +14,16 @@ import type { Making } from './use-make.ts';
 const AS_NOW = '';
 
 /** Another foam: what it would do to the fit sheet stands here before it is taken. */
-export function FoamFields({ making, foams }: { making: Making; foams: readonly FoamGrade[] }) {
+export function FoamFields({
+  making,
+  foams,
+  wrapLostMm,
+}: {
+  making: Making;
+  foams: readonly FoamGrade[];
+  /** Lost of each inch of wrap under a sitter. */
+  wrapLostMm: number;
+}) {
   const { piece, spec, canEdit, changePiece } = making;
   const { maker, engine } = useSurroundings();
   const format = useFormat();
@@ -33,9 +42,8 @@ export function FoamFields({ making, foams }: { making: Making; foams: readonly 
   const thicknessMm = thickness?.problem ? cushion.thicknessMm : (thickness?.value ?? cushion.thicknessMm);
   const foam = useMemo(() => {
     if (!grade) return cushion.foam;
-    const { densityKgM3, ifd25N, supportFactor } = grade;
-    return { grade: grade.name, densityKgM3, ifd25N, supportFactor };
-  }, [grade, cushion.foam]);
+    return foamOfGrade(grade, wrapLostMm);
+  }, [grade, cushion.foam, wrapLostMm]);
   const differs = foam !== cushion.foam || Math.abs(thicknessMm - cushion.thicknessMm) > 1e-6;
   const effect = useMemo(() => {
     const changed = differs ? withFoam(piece, spec.kind, foam, thicknessMm) : piece;
@@ -58,7 +66,11 @@ export function FoamFields({ making, foams }: { making: Making; foams: readonly 
     <div className="grid gap-4">
       <p className="text-sm text-ink-2">
         All {spec.kind === 'seat' ? 'seats' : 'backs'} of {piece.mark}: {cushion.foam.grade},{' '}
-        {facts(cushion.foam)}, {format.length(cushion.thicknessMm)} thick.
+        {facts(cushion.foam)}, {format.length(cushion.thicknessMm)} thick
+        {cushion.foam.layers && `, in ${cushion.foam.layers.length} layers`}
+        {cushion.foam.wrap &&
+          `, ${format.length(cushion.foam.wrap.thicknessMm)} of it wrap, of which ${format.length(cushion.foam.wrap.lostMm)} is lost under a sitter`}
+        .
       </p>
       {canEdit && (
         <div className="grid items-start gap-x-6 gap-y-4 phone:grid-cols-2">

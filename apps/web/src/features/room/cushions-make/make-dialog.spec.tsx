@@ -1,5 +1,5 @@
 import { createBodyModel, loadRuleBook } from '@settlewright/anthropometry';
-import { ARRANGEMENTS, type SetDocument } from '@settlewright/geometry';
+import { ARRANGEMENTS, type FoamGrade, type SetDocument } from '@settlewright/geometry';
 import rules from '@settlewright/seed-data/fit-rules.json';
 import summary from '@settlewright/seed-data/populations/ansur2.json';
 import { screen, within } from '@testing-library/react';
@@ -39,9 +39,16 @@ function Row() {
   return <CushionsButton piece={piece} actions={actions} />;
 }
 
+const ownFoams: FoamGrade[] = [];
+
 async function open(canEdit = true, detail: RoomSurroundings['detail'] = 'full'): Promise<RoomStore> {
   signInAs('designer');
-  const kept = { number: 0, settings: { allowancesMm: {}, foams: [] }, changedAt: null, changedByName: null };
+  const kept = {
+    number: 0,
+    settings: { allowancesMm: {}, foams: ownFoams },
+    changedAt: null,
+    changedByName: null,
+  };
   server.use(http.get('*/api/workshops/:id/cushion-settings', () => HttpResponse.json(kept)));
   const store = createRoomStore(seated);
   const surroundings: RoomSurroundings = {
@@ -148,6 +155,39 @@ describe('another foam', () => {
     const bench = store.getState().document.pieces.find(({ id }) => id === 'b1');
     expect(bench?.kind === 'bench' && bench.seatCushion.foam.grade).toBe('quick-dry outdoors');
     expect(within(screen.getByRole('dialog')).queryByRole('table')).toBeNull();
+  });
+
+  it('in layers and with a wrap is taken as the workshop buys it', async () => {
+    const layer = { name: 'layer', densityKgM3: 40, thicknessMm: 50, ifd25N: 150 };
+    ownFoams.push({
+      ...{
+        name: 'two on one',
+        use: 'seat',
+        densityKgM3: 40,
+        ifd25N: 200,
+        supportFactor: 2,
+        thicknessMm: 100,
+      },
+      ...{ layers: [layer, { ...layer, ifd25N: 300 }], wrapMm: 25.4 },
+    });
+    server.use(http.get('*/sets/s/test-sits', () => HttpResponse.json({ items: [], total: 0 })));
+    const store = await open();
+    ownFoams.length = 0;
+    await userEvent.click(screen.getByRole('button', { name: /^Foam, and what another/ }));
+    await pick(/^Try another foam,/, /^two on one/);
+    await userEvent.click(screen.getByRole('button', { name: 'Take it' }));
+    const bench = store.getState().document.pieces.find(({ id }) => id === 'b1');
+    expect(bench?.kind === 'bench' && bench.seatCushion.foam).toMatchObject({
+      layers: [
+        { share: 0.5, times: 0.75 },
+        { share: 0.5, times: 1.5 },
+      ],
+      wrap: { thicknessMm: 25.4, lostMm: 12.7 },
+    });
+    expect(screen.getByText(/in 2 layers, 1″ of it wrap, of which ½″ is lost under a sitter/)).toBeVisible();
+    await userEvent.click(screen.getByRole('button', { name: 'Test sits' }));
+    expect(await screen.findByText(/^A sit is kept for a plain foam/)).toBeVisible();
+    expect(screen.queryByRole('form')).toBeNull();
   });
 
   it('that is softer lets everybody down, the heaviest most, within its band', () => {

@@ -95,7 +95,7 @@ export default function MakeDialog({ piece: opened, actions, onClose }: MakeDial
               </Disclosure>
             )}
             <Disclosure words="Foam, and what another would do">
-              <FoamFields making={making} foams={rules.foams} />
+              <FoamFields making={making} foams={rules.foams} wrapLostMm={rules.settings.wrapLost.valueMm} />
             </Disclosure>
             {spec.kind === 'seat' && (
               <Disclosure words="Test sits">

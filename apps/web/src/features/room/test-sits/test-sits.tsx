@@ -43,6 +43,7 @@ function KeptSits({ making, tested }: { making: Making; tested: Foam['tested'] }
   if (sits.isPending) return <LoadingLine words="Fetching the test sits" />;
   if (sits.isError)
     return <Notice tone="wont">The test sits could not be fetched: {sits.error.message}</Notice>;
+  const isPlain = !seatCushion.foam.layers && !seatCushion.foam.wrap;
   const found = testedBySits(seatCushion, sits.data);
   const differs = JSON.stringify(found) !== JSON.stringify(tested);
   const take = (next: Foam['tested']) =>
@@ -68,7 +69,12 @@ function KeptSits({ making, tested }: { making: Making; tested: Foam['tested'] }
         </p>
       )}
       <TestSitTable sits={sits.data} own={sitsOn(seatCushion, sits.data)} canEdit={canEdit} />
-      {canEdit && (
+      {canEdit && !isPlain && (
+        <p className="text-sm text-ink-2">
+          A sit is kept for a plain foam; {seatCushion.foam.grade} has layers or a wrap.
+        </p>
+      )}
+      {canEdit && isPlain && (
         <>
           <p className="text-sm text-ink-2">
             A sit on {seatCushion.foam.grade}, {length(seatCushion.thicknessMm)} thick, as {piece.mark} has
