@@ -21,6 +21,8 @@ const STILL_SAMPLES = 10;
 const SAMPLE_MS = 200;
 /** About nine in a hundred are code that the browser makes of scripts which run often; objects are the rest. */
 const MOST_HEAP_GROWTH = 0.14;
+/** Points and pixels, which are kept beside the objects: none of them is code. */
+const MOST_BACKING_GROWTH = 0.1;
 /** Small, as the machine draws without a graphics card. */
 const WINDOW = { width: 480, height: 360 };
 const TIMEOUT_MS = 300_000;
@@ -51,7 +53,7 @@ const geometriesOf = async (page: Page): Promise<number> =>
   Number(await page.locator('[data-scene]').getAttribute('data-scene-geometries'));
 
 /** What is held once the skins of the bodies, which come from a worker, are there as well. */
-async function held(page: Page, client: CDPSession): Promise<{ geometries: number; heapBytes: number }> {
+async function held(page: Page, client: CDPSession) {
   let geometries = await geometriesOf(page);
   for (let still = 0; still < STILL_SAMPLES; still++) {
     await page.waitForTimeout(SAMPLE_MS);
@@ -60,8 +62,8 @@ async function held(page: Page, client: CDPSession): Promise<{ geometries: numbe
     geometries = now;
   }
   await client.send('HeapProfiler.collectGarbage');
-  const { usedSize } = await client.send('Runtime.getHeapUsage');
-  return { geometries, heapBytes: usedSize };
+  const { usedSize, backingStorageSize } = await client.send('Runtime.getHeapUsage');
+  return { geometries, heapBytes: usedSize, backingBytes: backingStorageSize };
 }
 
 describe('a long day at one set', () => {
@@ -95,6 +97,8 @@ describe('a long day at one set', () => {
       const after = await held(page, client);
       expect(before.geometries).toBeGreaterThan(0);
       expect(after.geometries).toBeLessThanOrEqual(before.geometries);
+      expect(before.backingBytes).toBeGreaterThan(0);
+      expect(after.backingBytes / before.backingBytes - 1).toBeLessThanOrEqual(MOST_BACKING_GROWTH);
       expect(after.heapBytes / before.heapBytes - 1).toBeLessThanOrEqual(MOST_HEAP_GROWTH);
       expect(complaints).toEqual([]);
     },
