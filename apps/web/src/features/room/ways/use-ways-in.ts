@@ -15,6 +15,8 @@ export interface WaysFound {
   comers: readonly NamedComer[];
   /** Names of who sits in the set and has no measures here, or none that make a body: nothing is said of them. */
   leftOut: readonly string[];
+  /** Names of the children who sit in the set: nothing is said of them either, for another reason. */
+  children: readonly string[];
   heightsMm: readonly [number, number];
   /** Of this very document; undefined while it is looked for. */
   found: WaysIn | undefined;
@@ -44,9 +46,12 @@ export function useWaysIn(document: SetDocument, mayMove: MayMove): WaysFound {
   );
   const leftOut = useMemo(() => {
     const counted = new Set(comers.map(({ placeId }) => placeId));
-    return document.seating
-      .filter(({ pieceId, place }) => !counted.has(`${pieceId}:${place}`))
-      .map(({ sitter }) => sitterName(sitter, cast));
+    const uncounted = document.seating.filter(({ pieceId, place }) => !counted.has(`${pieceId}:${place}`));
+    const named = (children: boolean) =>
+      uncounted
+        .filter(({ sitter }) => (sitter.kind === 'child') === children)
+        .map(({ sitter }) => sitterName(sitter, cast));
+    return { measures: named(false), children: named(true) };
   }, [document, cast, comers]);
   const [answer, setAnswer] = useState<{
     to: typeof comers;
@@ -65,5 +70,12 @@ export function useWaysIn(document: SetDocument, mayMove: MayMove): WaysFound {
     };
   }, [document, comers, heightsMm, mayMove]);
   const current = answer?.to === comers && answer.moving === mayMove ? answer : undefined;
-  return { comers, leftOut, heightsMm, found: current?.found, fault: current?.fault };
+  return {
+    comers,
+    leftOut: leftOut.measures,
+    children: leftOut.children,
+    heightsMm,
+    found: current?.found,
+    fault: current?.fault,
+  };
 }

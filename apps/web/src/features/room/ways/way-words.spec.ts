@@ -1,6 +1,6 @@
 import type { WayIn } from '@settlewright/geometry';
 import { describe, expect, it } from 'vitest';
-import { sayHelp, sayWay } from './way-words.ts';
+import { sayChildren, sayHelp, sayWay } from './way-words.ts';
 
 const naming = { length: (mm: number) => `${mm} mm`, name: (id: string) => (id === 'b1:1' ? 'Ada' : 'Ben') };
 const pose = { xMm: 0, zMm: 0, headingRad: 0 };
@@ -57,4 +57,10 @@ describe('a way in', () => {
       'The widest way leads past Ben once seated. Or past nobody, 300 mm at the tightest.',
     ]);
   });
+});
+
+it('says why nothing is said of children', () => {
+  expect(sayChildren(['Child, mark 3'])).toBe(
+    'Not known: how Child, mark 3 gets in, and whether others get past. Of a child only height, weight and lower leg are known; how broad and deep it is drawn is for scale.',
+  );
 });

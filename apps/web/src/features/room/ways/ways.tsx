@@ -17,7 +17,7 @@ import { showWay } from './shown-way.ts';
 import { useWalk } from './use-walk.ts';
 import { useWaysIn } from './use-ways-in.ts';
 import { WayPlan } from './way-plan.tsx';
-import { sayHelp, sayLeftOut, sayWay } from './way-words.ts';
+import { sayChildren, sayHelp, sayLeftOut, sayWay } from './way-words.ts';
 
 const NO_POSES: never[] = [];
 
@@ -26,7 +26,7 @@ export default function Ways({ document }: { document: SetDocument }) {
   const { engine, style, canEdit } = useSurroundings();
   const take = useTakeStep();
   const [mayMove, setMayMove] = useState<MayMove>({ chairs: true, leaves: true });
-  const { comers, leftOut, heightsMm, found, fault } = useWaysIn(document, mayMove);
+  const { comers, leftOut, children, heightsMm, found, fault } = useWaysIn(document, mayMove);
   const [chosen, setChosen] = useState<string>();
   const [narrow, setNarrow] = useState(false);
   const widest = found?.ways.find(({ placeId }) => placeId === chosen) ?? found?.ways[0];
@@ -58,6 +58,7 @@ export default function Ways({ document }: { document: SetDocument }) {
     <div className="flex flex-col gap-3 text-sm">
       {comers.length === 0 && <p>Seat somebody whose measures are known to see how they get in.</p>}
       {leftOut.length > 0 && <p>{sayLeftOut(leftOut)}</p>}
+      {children.length > 0 && <p>{sayChildren(children)}</p>}
       {fault && <p className="text-wont">{fault} Change the set or open this again.</p>}
       {comers.length > 0 && !found && !fault && <p role="status">Looking for the ways in.</p>}
       {way && found && (
