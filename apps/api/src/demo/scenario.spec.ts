@@ -39,7 +39,7 @@ describe('the waiting room of the demonstration', () => {
     expect(all.fits.mixed.value).toBeLessThan(0.9);
   });
 
-  it('fits the crew in most, and leaves some of it tight or not fitting', () => {
+  it('fits the crew in most, leaves some of it tight, and one height open that a sit on the foam would settle', () => {
     const sitters = room.seating.flatMap(({ pieceId, place, sitter }) => {
       if (sitter.kind !== 'cast') return [];
       const person = SCENARIO.cast.find(({ name }) => name === sitter.castId)!;
@@ -65,7 +65,7 @@ describe('the waiting room of the demonstration', () => {
     const { counts } = checkSet({ situation, sitters, ruleBook, model, settings: room.asked });
     const said = Object.values(counts).reduce((sum, count) => sum + count, 0);
     expect(counts.fits / said).toBeGreaterThan(0.75);
-    expect(counts.wontFit).toBeGreaterThan(0);
+    expect(counts.notKnown).toBeGreaterThan(0);
     expect(counts.tight).toBeGreaterThan(0);
   });
 });
