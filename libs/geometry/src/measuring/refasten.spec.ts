@@ -17,7 +17,9 @@ const ties = { pieceId: seat.pieceId, partId: seat.id };
 const NOTCHED: CushionShape = { notches: [{ edge: 'back', fromMm: 0, widthMm: 200, depthMm: 150 }] };
 
 const pointsOf = (document: SetDocument) =>
-  document.dimensions!.flatMap(({ ends }) => ends.map((end) => endPoint(end, measuringScene(document, deriveParts(document)))!));
+  document.dimensions!.flatMap(({ ends }) =>
+    ends.map((end) => endPoint(end, measuringScene(document, deriveParts(document)))!),
+  );
 const apart = (a: readonly number[], b: readonly number[]) => Math.hypot(...a.map((n, i) => n - b[i]!));
 
 describe('pinned lines on a cushion that takes another shape', () => {

@@ -23,8 +23,7 @@ export default function PutArrangement({ onChoose, onClose }: Props) {
   const remove = useRemoveArrangement(workshopId);
   const putIn = usePutIn(onChoose);
   const items = useMemo(
-    () =>
-      (kept.data ?? []).map((arrangement) => ({ arrangement, plan: planOf(arrangement.document) })),
+    () => (kept.data ?? []).map((arrangement) => ({ arrangement, plan: planOf(arrangement.document) })),
     [kept.data],
   );
   const pxPerMm = commonScale(
