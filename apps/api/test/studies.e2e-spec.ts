@@ -258,9 +258,10 @@ describe('a long study', () => {
     while (held === 0) {
       victim.signal('SIGCONT');
       ({ id } = await start());
+      // The others may be through before the victim has looked for a block: then once more.
       await until(
-        () => Promise.resolve(victim.counted(id).length),
-        (count) => count > 0,
+        async () => victim.counted(id).length > 0 || (await look(id)).state === 'done',
+        (isOn) => isOn,
       );
       victim.signal('SIGSTOP');
       await until(
