@@ -1,6 +1,6 @@
 import { describe, expect, it } from 'vitest';
 import type { ViewFrame } from '../scene/view-frame.ts';
-import { isEndOn, placeFlags, placeNames, tapePath } from './layout.ts';
+import { isEndOn, placeFlags, placeNames, placeNamesAtHeads, tapePath } from './layout.ts';
 
 const frame: ViewFrame = {
   target: [0, 0, 0],
@@ -12,6 +12,21 @@ const frame: ViewFrame = {
   depthMm: [3000, -3000],
 };
 const viewport = { width: 800, height: 400 };
+
+describe('names at the heads', () => {
+  it('stand below them, the next a row lower where heads are nearer than names are wide', () => {
+    const heads = [-250, -100, 400].map((x, n) => ({
+      id: `p${n}`,
+      headMm: [x, 0, 0] as const,
+      width: 70,
+      height: 16,
+    }));
+    const [one, next, far] = placeNamesAtHeads(frame, viewport, heads);
+    expect(next!.x - one!.x).toBeLessThan(70);
+    expect(next!.y - one!.y).toBeGreaterThanOrEqual(17);
+    expect(far!.y).toBe(one!.y);
+  });
+});
 
 describe('names above the heads', () => {
   it('stand in one row in the order of the heads, apart from each other', () => {

@@ -109,10 +109,16 @@ export function placeNamesAtHeads(
   names: readonly NameToPlace[],
 ): PlacedName[] {
   const pixels = viewport.height / (2 * frame.halfHeightMm);
-  return names.map((name) => {
-    const head = project(frame, viewport, name.headMm);
-    const x = Math.min(Math.max(head.x, EDGE + name.width / 2), viewport.width - EDGE - name.width / 2);
-    return { id: name.id, x, y: head.y + HEAD_WIDTH_MM * 0.75 * pixels + name.height / 2, head };
+  const taken: Box[] = [];
+  return names.map(({ id, headMm, width, height }) => {
+    const head = project(frame, viewport, headMm);
+    const x = Math.min(Math.max(head.x, EDGE + width / 2), viewport.width - EDGE - width / 2);
+    const below = head.y + HEAD_WIDTH_MM * 0.75 * pixels + height / 2;
+    // Heads side by side may be nearer than their names are wide: the next stands a row lower.
+    const rows = [0, 1, 2].map((row) => boxAt(x, below + row * (height + 2), width, height));
+    const box = rows.find((row) => !taken.some((other) => meet(row, other, 1))) ?? rows[0]!;
+    taken.push(box);
+    return { id, x, y: (box.top + box.bottom) / 2, head };
   });
 }
 
