@@ -50,13 +50,14 @@ export function armsFor(
   }
   const table = choice === 'lap' ? undefined : rests.table && armOnTable(f, bend, rests.table, up);
   const usual = table ?? lap();
-  const notes: PoseNote[] = [{ kind: table ? 'forearms-on-table' : 'hands-on-lap' }];
+  const kind = table ? 'forearms-on-table' : 'hands-on-lap';
+  const notes: PoseNote[] = [{ kind }];
   const without = { arms: [usual, usual] as const, notes };
   if (choice === 'table' && !table) notes.push({ kind: 'table-out-of-reach' });
   if (choice === 'cup') {
     const cup = rests.table && armToCup(f, bend, rests.table, up);
     if (!cup) return { ...without, notes: [...notes, { kind: 'table-out-of-reach' }] };
-    return { arms: [usual, cup], notes: [...notes, { kind: 'hand-to-cup' }] };
+    return { arms: [usual, cup], notes: [{ kind, side: 'left' }, { kind: 'hand-to-cup' }] };
   }
   if (choice === 'sill-left' || choice === 'sill-right') {
     const side = choice === 'sill-left' ? 'left' : 'right';
@@ -65,7 +66,10 @@ export function armsFor(
     if (!arm) return { ...without, notes: [...notes, { kind: 'sill-out-of-reach', side }] };
     return {
       arms: side === 'left' ? [arm, usual] : [usual, arm],
-      notes: [...notes, { kind: 'forearm-on-sill', side }],
+      notes: [
+        { kind, side: side === 'left' ? 'right' : 'left' },
+        { kind: 'forearm-on-sill', side },
+      ],
     };
   }
   return without;

@@ -59,6 +59,10 @@ describe('a posture that somebody chose', () => {
     for (const side of ['left', 'right'] as const) {
       const pose = sit({ arms: `sill-${side}` }, { sills: [{ ...sill, side }] });
       expect(pose.notes).toContainEqual({ kind: 'forearm-on-sill', side });
+      expect(pose.notes).toContainEqual({
+        kind: 'forearms-on-table',
+        side: side === 'left' ? 'right' : 'left',
+      });
       const wrist = pose.joints[`${side}Wrist`];
       expect(Math.abs(wrist[0])).toBeGreaterThan(230);
       expect(Math.abs(wrist[0])).toBeLessThan(230 + 150);

@@ -19,5 +19,6 @@ export interface PoseNote {
     /** Something was chosen; the checks answer for the posture without it. */
     | 'not-as-checked';
   valueMm?: number;
+  /** Of one arm or leg alone; left out where it is true of both. */
   side?: 'left' | 'right';
 }

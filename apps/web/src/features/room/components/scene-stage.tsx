@@ -216,7 +216,7 @@ export function SceneStage({ picture, piece, address, actions, several, onOpenCe
             />
           </Suspense>
         )}
-        {!isMoving && <WayOnScene controller={view.controller} style={style} />}
+        {!isMoving && <WayOnScene controller={view.controller} labels={labels} style={style} />}
         {!clientView && !isMoving && (
           <GapsOnScene controller={view.controller} cut={view.cut} style={style} />
         )}

@@ -1,8 +1,9 @@
 import { formatLength, type LengthStyle, type PoseNote } from '@settlewright/geometry';
 
 /** How somebody sits, one note of the pose in words. */
-export function sayNote({ kind, valueMm = 0, side = 'left' }: PoseNote, style: LengthStyle): string {
+export function sayNote({ kind, valueMm = 0, side }: PoseNote, style: LengthStyle): string {
   const size = formatLength(valueMm, style);
+  const sided = (one: string, both = one) => (side ? `${side} ${one}` : both);
   switch (kind) {
     case 'feet-hang':
       return `feet hang ${size}`;
@@ -11,9 +12,9 @@ export function sayNote({ kind, valueMm = 0, side = 'left' }: PoseNote, style: L
     case 'knees-lift':
       return 'the seat is low: the thighs lift off it';
     case 'forearms-on-table':
-      return 'forearms on the table';
+      return sided('forearm on the table', 'forearms on the table');
     case 'hands-on-lap':
-      return 'hands on the lap';
+      return sided('hand on the lap', 'hands on the lap');
     case 'feet-on-rail':
       return 'feet on the rail';
     case 'ankles-crossed':
@@ -31,7 +32,7 @@ export function sayNote({ kind, valueMm = 0, side = 'left' }: PoseNote, style: L
     case 'table-out-of-reach':
       return 'no table in reach';
     case 'forearm-on-sill':
-      return `${side} forearm on the sill`;
+      return sided('forearm on the sill');
     case 'sill-out-of-reach':
       return `no sill in reach on the ${side}`;
     case 'not-as-checked':

@@ -1,3 +1,5 @@
+import { boxAt, meet, type Box } from '../overlay/box.ts';
+
 /** A name in the drawing: its middle in pixels, how long it is, and whether it goes before others. */
 export interface PlacedName {
   x: number;
@@ -11,16 +13,15 @@ export interface PlacedName {
 const LETTER_PX = 6;
 const LINE_PX = 15;
 
-/** The names that can be read: one that would lie on another is left to the list. */
-export function clearOfEachOther<T extends PlacedName>(names: readonly T[]): Set<T> {
+/** The names that can be read: one that would lie on another, or under a label, is left to the list. */
+export function clearOfEachOther<T extends PlacedName>(names: readonly T[], labels: readonly Box[]): Set<T> {
   const kept = new Set<T>();
+  const taken = [...labels];
   for (const one of [...names].sort((a, b) => Number(b.first) - Number(a.first))) {
-    const meets = [...kept].some(
-      (other) =>
-        Math.abs(one.x - other.x) < ((one.letters + other.letters) / 2) * LETTER_PX &&
-        Math.abs(one.y - other.y) < LINE_PX,
-    );
-    if (!meets) kept.add(one);
+    const box = boxAt(one.x, one.y, one.letters * LETTER_PX, LINE_PX);
+    if (taken.some((other) => meet(box, other, 0))) continue;
+    kept.add(one);
+    taken.push(box);
   }
   return kept;
 }

@@ -1,5 +1,6 @@
 import type { FloorShape, Vec3 } from '@settlewright/geometry';
 import { useCallback, useEffect, useLayoutEffect, useRef } from 'react';
+import type { LabelBoxes } from '../overlay/box.ts';
 import type { ViewController } from '../scene/view-controller.ts';
 import { project } from '../scene/view-frame.ts';
 import { FLOOR_WORDS } from './floor-words.ts';
@@ -11,10 +12,12 @@ const NAMED: readonly FloorShape['kind'][] = ['floor', 'approach', 'knee-space',
 interface Props {
   controller: ViewController;
   floor: readonly FloorShape[];
+  /** Where names and flags stand just now. */
+  labels: LabelBoxes;
 }
 
 /** Floor for a wheelchair over the drawing: dashed where it lies, knee space at its height, each with its clause. */
-export function FloorOnScene({ controller, floor }: Props) {
+export function FloorOnScene({ controller, floor, labels }: Props) {
   const drawn = useRef<SVGGElement>(null);
   const layOut = useCallback(() => {
     const frame = controller.frame();
@@ -36,11 +39,12 @@ export function FloorOnScene({ controller, floor }: Props) {
       text.setAttribute('y', y.toFixed(1));
       named.push({ text, x, y, letters: text.textContent.length, first: blockedBy.length > 0 });
     });
-    const kept = clearOfEachOther(named);
+    const kept = clearOfEachOther(named, labels.now());
     for (const one of named) one.text.setAttribute('visibility', kept.has(one) ? 'visible' : 'hidden');
-  }, [controller, floor]);
+  }, [controller, floor, labels]);
   useLayoutEffect(layOut);
-  useEffect(() => controller.subscribe(layOut), [controller, layOut]);
+  // Anew after each render, as the labels do: names keep clear of where those have just gone.
+  useEffect(() => controller.subscribe(layOut));
   return (
     <svg
       aria-hidden="true"

@@ -1,6 +1,7 @@
 import { formatLength, type LengthStyle, type Vec3 } from '@settlewright/geometry';
 import { useCallback, useEffect, useLayoutEffect, useRef } from 'react';
 import { Measure } from '@/components/measure.tsx';
+import type { LabelBoxes } from '../overlay/box.ts';
 import type { ViewController } from '../scene/view-controller.ts';
 import { project } from '../scene/view-frame.ts';
 import { FloorOnScene } from './floor-on-scene.tsx';
@@ -9,8 +10,15 @@ import { useShownWay } from './shown-way.ts';
 /** Just off the floor, where feet go. */
 const FLOOR_MM = 5;
 
+interface Props {
+  controller: ViewController;
+  /** Where names and flags stand just now. */
+  labels: LabelBoxes;
+  style: LengthStyle;
+}
+
 /** The chosen way in over the drawing: its line on the floor, and a flag where it is tightest. */
-export function WayOnScene({ controller, style }: { controller: ViewController; style: LengthStyle }) {
+export function WayOnScene({ controller, labels, style }: Props) {
   const { way, floor } = useShownWay();
   const line = useRef<SVGPathElement>(null);
   const flag = useRef<HTMLDivElement>(null);
@@ -39,7 +47,7 @@ export function WayOnScene({ controller, style }: { controller: ViewController; 
       className="pointer-events-none absolute inset-0 overflow-hidden"
       data-way-in={way ? '' : undefined}
     >
-      {floor.length > 0 && <FloorOnScene controller={controller} floor={floor} />}
+      {floor.length > 0 && <FloorOnScene controller={controller} floor={floor} labels={labels} />}
       <svg className="absolute inset-0 size-full" fill="none">
         <path ref={line} className="stroke-chalk" strokeWidth="2.5" strokeDasharray="7 4" />
       </svg>
