@@ -45,6 +45,7 @@ describe('a name that somebody typed', () => {
       'order_events',
       'order_messages',
       'populations',
+      'arrangements',
       'studies',
     ];
     const all: unknown[] = [];
@@ -56,7 +57,7 @@ describe('a name that somebody typed', () => {
 
   /** The name in every text of a production. */
   beforeEach(async () => {
-    for (const table of ['productions', 'populations', 'outbox_mails', 'audit_entries']) {
+    for (const table of ['productions', 'populations', 'arrangements', 'outbox_mails', 'audit_entries']) {
       await test.dataSource.query(`DELETE FROM ${table}`);
     }
     const production = await createProduction(test, { name: SAID, summary: SAID });
@@ -89,6 +90,7 @@ describe('a name that somebody typed', () => {
     await made(`${orderPath}/messages`, { text: SAID });
     const survey = surveyBody({ name: SAID, source: SAID });
     const { id: populationId } = await made(`/workshops/${place.workshop.id}/populations`, survey);
+    await made(`/workshops/${place.workshop.id}/arrangements`, { name: SAID, document });
     // One is counted at once, the other waits with the whole population in its question.
     for (const people of [200, 50_000]) {
       await made(`${place.setPath}/studies`, { populationId, people, draftNumber: 2 });
@@ -123,6 +125,10 @@ describe('a name that somebody typed', () => {
       'Set, draft, who said so of known differences',
       'Population, its name',
       'Population, its source',
+      'Arrangement, its name',
+      'Arrangement, name of B1',
+      'Arrangement, note on B1',
+      'Arrangement, foam of B1',
       'Study, name of its population',
       'Study, source of its population',
     ]) {

@@ -8,7 +8,7 @@ import type { Page, PageQuery } from '../common/page.dto';
 import { Problem } from '../common/problem';
 import { readPage } from '../common/read-page';
 import { readSentDocument } from '../sets/sent-document';
-import { Workshop } from '../workshops/entities/workshop.entity';
+import { WorkshopsService } from '../workshops/workshops.service';
 import type { KeepArrangementDto } from './arrangement.dto';
 import { KeptArrangement } from './kept-arrangement.entity';
 
@@ -19,6 +19,7 @@ const MOST = 200;
 export class ArrangementsService {
   constructor(
     @InjectRepository(KeptArrangement) private readonly arrangements: Repository<KeptArrangement>,
+    private readonly workshops: WorkshopsService,
     private readonly audit: AuditService,
   ) {}
 
@@ -39,7 +40,7 @@ export class ArrangementsService {
     const { workshopId } = member;
     return this.arrangements.manager.transaction(async (manager) => {
       // Two who keep one at once are counted one after the other.
-      await manager.findOne(Workshop, { where: { id: workshopId }, lock: { mode: 'pessimistic_write' } });
+      await this.workshops.lock(manager, workshopId);
       if ((await manager.countBy(KeptArrangement, { workshopId })) >= MOST) {
         const message = `a workshop keeps at most ${MOST} arrangements; take one off the list first`;
         throw Problem.invalid([{ path: 'name', code: 'too-many', message }]);

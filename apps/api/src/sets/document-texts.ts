@@ -1,4 +1,5 @@
 import type { Piece, SetDocument } from '@settlewright/geometry';
+import type { KeptText } from '../common/kept-text';
 
 /** The longest that the document's schema takes. */
 const MAX = { name: 80, note: 2000, grade: 60, difference: 1000, by: 120 };
@@ -26,6 +27,16 @@ export function withTexts(
       ...(one.by === undefined ? {} : { by: fitted(one.by, MAX.by, 'who said so of known differences') }),
     })),
   };
+}
+
+/** Every text that people typed into a document, with the place it stands at: "Dining car, draft, note on B1". */
+export function textsOf(document: SetDocument, where: string): KeptText[] {
+  const texts: KeptText[] = [];
+  withTexts(document, (text, part) => {
+    texts.push({ where: `${where}, ${part}`, text });
+    return text;
+  });
+  return texts;
 }
 
 function changedPiece(piece: Piece, change: Change): Piece {

@@ -1,9 +1,9 @@
 import type { SetDocument } from '@settlewright/geometry';
 import { Injectable } from '@nestjs/common';
 import type { EntityManager } from 'typeorm';
-import type { KeptRow, KeptText } from '../common/kept-text';
+import type { KeptRow } from '../common/kept-text';
 import type { MemberInfo } from '../common/access.decorator';
-import { withTexts } from './document-texts';
+import { textsOf, withTexts } from './document-texts';
 import { DraftsService } from './drafts.service';
 import { DesignedSet } from './entities/designed-set.entity';
 import { RevisionApproval } from './entities/revision-approval.entity';
@@ -114,13 +114,4 @@ export class SetTexts {
     await manager.update(DesignedSet, { id: set.id }, { draftNumber });
     await this.drafts.keep(manager, member, { ...set, draftNumber }, document);
   }
-}
-
-function textsOf(document: SetDocument, where: string): KeptText[] {
-  const texts: KeptText[] = [];
-  withTexts(document, (text, part) => {
-    texts.push({ where: `${where}, ${part}`, text });
-    return text;
-  });
-  return texts;
 }

@@ -1,6 +1,7 @@
 import { Injectable } from '@nestjs/common';
 import { InjectDataSource } from '@nestjs/typeorm';
 import { DataSource, type EntityManager } from 'typeorm';
+import { arrangementTexts } from '../../arrangements/arrangement-texts';
 import type { MemberInfo } from '../../common/access.decorator';
 import type { KeptRow } from '../../common/kept-text';
 import { PersonName } from '../../common/person-name';
@@ -17,7 +18,7 @@ import type { NamedPlaceDto, NamedPlacesDto } from './named-places.dto';
 /** Places shown of each kind; the counts are of all. */
 const SHOWN = 200;
 
-/** Finds a person's name in what people typed about a production and the workshop’s populations, and takes it out. */
+/** Finds a person’s name in what people typed about a production and into what the whole workshop keeps, and takes it out. */
 @Injectable()
 export class ErasedNames {
   constructor(
@@ -80,7 +81,8 @@ export class ErasedNames {
     yield* this.sets.of(manager, member, productionId, options);
     yield* await testSitTexts(manager, productionId);
     yield* this.orders.of(manager, productionId);
-    // Populations belong to the whole workshop, and so do the words that studies and searches copied from them.
+    // The rest belongs to the whole workshop: kept pieces, populations, and what studies and searches copied from those.
+    yield* arrangementTexts(manager, member.workshopId);
     yield* populationTexts(manager, member.workshopId);
     yield* studyTexts(manager, member.workshopId, options);
     yield* searchTexts(manager, member.workshopId);
