@@ -5,6 +5,7 @@ import { partEdges } from '../drawing/solid-outline.ts';
 import { deriveParts } from '../pieces/kinds.ts';
 import { withCushionChoices } from '../room/cushion-choices.ts';
 import type { SetDocument } from '../room/document.ts';
+import type { Vec3 } from '../parts/part.ts';
 import type { MeasureEnd } from './dimension.ts';
 import { pinDimension } from './edit-dimensions.ts';
 import { endPoint } from './measure-ends.ts';
@@ -50,6 +51,32 @@ describe('pinned lines on a cushion that takes another shape', () => {
     const back = refastenDimensions(cut, withCushionChoices(cut, {}));
     const kept = pointsOf(back).filter((point, n) => apart(point, before[n]!) < 0.5);
     expect(kept.length).toBeGreaterThanOrEqual(before.length - 6);
+  });
+
+  it('stay when as many corners are counted another way', () => {
+    const cornered = (edge: 'back' | 'front'): CushionShape => ({
+      notches: [{ edge, fromMm: 0, widthMm: 200, depthMm: 150 }],
+    });
+    const back = refastenDimensions(pinned, shaped(pinned, 'seat', cornered('back')));
+    const front = refastenDimensions(back, shaped(back, 'seat', cornered('front')));
+    const were = pointsOf(back);
+    const off = pointsOf(front).map((point, n) => apart(point, were[n]!));
+    expect(off.filter((mm) => mm < 0.5).length).toBeGreaterThanOrEqual(were.length - 6);
+  });
+
+  it('go along with a notch that is moved on its edge', () => {
+    const notched = (fromMm: number): CushionShape => ({
+      notches: [{ edge: 'back', fromMm, widthMm: 200, depthMm: 150 }],
+    });
+    const set = shaped(bench, 'seat', notched(300));
+    const part = deriveParts(set).find(({ id }) => id === seat.id)!;
+    const ends = [3, 4].map((corner): MeasureEnd => ({ on: 'corner', ...ties, corner }));
+    const across = pinDimension(set, [ends[0]!, ends[1]!]).document;
+    expect(apart(...(pointsOf(across) as [Vec3, Vec3]))).toBeCloseTo(150, 6);
+    const moved = refastenDimensions(across, shaped(across, 'seat', notched(600)));
+    expect(partEdges(part).corners).toHaveLength(16);
+    expect(apart(...(pointsOf(moved) as [Vec3, Vec3]))).toBeCloseTo(150, 6);
+    expect(apart(pointsOf(moved)[0]!, pointsOf(across)[0]!)).toBeCloseTo(300, 6);
   });
 
   it('leave the set as it is where no part changed', () => {

@@ -32,9 +32,19 @@ export function refastenDimensions(before: SetDocument, after: SetDocument): Set
   return moved ? withDimensions(after, dimensions) : after;
 }
 
-/** Whether corners and edges of two solids are counted alike. */
-const isAlike = (a: Part, b: Part): boolean =>
-  a.solid.shape === b.solid.shape && partEdges(a).corners.length === partEdges(b).corners.length;
+/** Cosine of how far an edge may turn and still be the same one: 45 degrees. */
+const SAME_WAY = Math.SQRT1_2;
+
+/** Whether corners and edges of two solids are counted alike: as many of them, and each edge runs about the same way. */
+function isAlike(a: Part, b: Part): boolean {
+  const [one, other] = [partEdges(a), partEdges(b)];
+  if (a.solid.shape !== b.solid.shape || one.corners.length !== other.corners.length) return false;
+  const run = ({ corners }: typeof one, [from, to]: [number, number]) => sub(corners[to]!, corners[from]!);
+  return one.edges.every((edge) => {
+    const [was, is] = [run(one, edge), run(other, edge)];
+    return dot(was, is) >= SAME_WAY * length(was) * length(is);
+  });
+}
 
 function nearest(end: MeasureEnd, old: Part, now: Part): MeasureEnd {
   const [before, { corners, edges }] = [partEdges(old), partEdges(now)];
