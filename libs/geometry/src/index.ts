@@ -108,6 +108,7 @@ export { orderModel, type ButtonSheet, type OrderModel, type ScheduleRow } from 
 export type { FoamTotal, OrderTotals } from './orders/order-totals.ts';
 export { clothPhrase } from './orders/cloth-phrase.ts';
 export * from './orders/order-words.ts';
+export * from './orders/order-drop.ts';
 export { saidOfCushion, SAID_OF_CUSHION, type SaidOfCushion } from './orders/said-of-cushion.ts';
 export type { ClothLayout, ClothPanel, PlacedPanel } from './cloth/cloth.ts';
 export { nestPanels } from './cloth/nest-panels.ts';

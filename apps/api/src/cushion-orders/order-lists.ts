@@ -4,11 +4,16 @@ import {
   type CutPanel,
   HOLD_DOWN_WORDS,
   type LengthStyle,
+  ORDER_SITTERS,
+  orderDrop,
+  type OrderSitter,
   outlineExtent,
   type ScheduleRow,
+  shownDropMm,
   TUFTING_WORDS,
   WELT_WORDS,
 } from '@settlewright/geometry';
+import { dropSourceWords } from '@settlewright/anthropometry';
 import { panelsDxf, type TitledPanel } from '@settlewright/geometry/export';
 import { type Cell, csvText } from '../common/spreadsheet-cell';
 import type { SpecPackData } from '../paper/spec-pack';
@@ -52,6 +57,7 @@ function columnsOf(
     { head: 'foam', of: ({ spec }) => spec.foam.grade },
     { head: 'foam density kg/m3', of: ({ spec }) => spec.foam.densityKgM3 },
     { head: 'foam 25 % IFD N', of: ({ spec }) => spec.foam.ifd25N },
+    ...dropColumns(size, unit),
     { head: 'construction', of: ({ spec }) => CONSTRUCTION_WORDS[spec.make.construction] },
     { head: 'closure', of: ({ spec }) => CLOSURE_WORDS[spec.make.closure] },
     { head: 'closure edge', of: ({ spec }) => spec.make.closureEdge },
@@ -66,6 +72,36 @@ function columnsOf(
     { head: 'template', of: ({ needsTemplate }) => needsTemplate },
     { head: 'notes', of: ({ spec }) => spec.notes },
     { head: 'not as asked', of: ({ spec }) => spec.faults.join('; ') },
+  ];
+}
+
+/** How far a seat goes down under two sitters who are nobody of the cast, and where that comes from. */
+function dropColumns(size: (mm: number | undefined) => Cell, unit: string): ReturnType<typeof columnsOf> {
+  const style: LengthStyle = { system: unit === 'mm' ? 'millimetres' : 'decimal-inches', roundTo: 16 };
+  const column = (sitter: OrderSitter, end: 'bestMm' | 'lowMm' | 'highMm', words: string) => {
+    const { pounds, kilograms } = ORDER_SITTERS[sitter];
+    const who = (unit === 'mm' ? kilograms : pounds).replace('\u00a0', ' ');
+    return {
+      head: `goes down under ${who}${words} ${unit}`,
+      of: ({ spec }: ScheduleRow) => {
+        const drop = orderDrop(spec);
+        return size(drop && shownDropMm(drop[sitter][end], style));
+      },
+    };
+  };
+  return [
+    ...(['light', 'heavy'] as const).flatMap((sitter) => [
+      column(sitter, 'bestMm', ''),
+      column(sitter, 'lowMm', ', least'),
+      column(sitter, 'highMm', ', most'),
+    ]),
+    {
+      head: 'goes down by',
+      of: ({ spec }) => {
+        const drop = orderDrop(spec);
+        return drop && dropSourceWords(drop.heavy).replace('\u00a0', ' ');
+      },
+    },
   ];
 }
 

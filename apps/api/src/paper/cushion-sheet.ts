@@ -5,6 +5,8 @@ import {
   formatLength,
   lengthStep,
   OFF_JOINT_MM,
+  orderDrop,
+  orderDropWords,
   scaleWords,
   shopScales,
 } from '@settlewright/geometry';
@@ -19,7 +21,7 @@ import { type CushionPlan, planBox, type PlanPlace } from './plan-place';
 import { sectionWords } from './section-words';
 import { leading, PEN, type Sheet } from './sheet';
 import type { SpecCushion, SpecPack } from './spec-pack';
-import { bareLength, handWords, marksWords, sinkWords } from './spec-words';
+import { bareLength, handWords, marksWords } from './spec-words';
 import { type Frame, frameOf } from './title-block';
 
 const FOOT_MM = 44;
@@ -228,11 +230,11 @@ function drawFoot(
     CHECK_BAR_MM,
   );
   drawCheckBar(sheet, barX, at.top + 18);
-  const sink =
-    cushion.kind === 'seat'
-      ? sinkWords(cushion, units)
-      : 'The back cushion is drawn as it is before anybody leans on it.';
-  paragraph(sheet, sink, barX, at.top + 26, CHECK_BAR_MM);
+  const drop = orderDrop(spec);
+  const unloaded = drop
+    ? orderDropWords(drop, units)
+    : 'The back cushion is drawn as it is before anybody leans on it.';
+  paragraph(sheet, unloaded, barX, at.top + 26, CHECK_BAR_MM);
 }
 
 function headMarks({ marks }: SpecCushion): string {

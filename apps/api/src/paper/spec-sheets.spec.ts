@@ -7,7 +7,6 @@ import { type Chain, chainDepth, drawChain } from './dimension-chain';
 import { breakLines } from './paragraph';
 import { spaces } from './cushion-chains';
 import { Sheet, type TextStyle } from './sheet';
-import { sinkWords } from './spec-words';
 
 interface Label {
   text: string;
@@ -134,14 +133,5 @@ describe('words', () => {
     );
     expect(curveWords({ apexMm: 0, recessMm: 25.4 }, inches)).toBe('gives way 1″ for the pelvis');
     expect(curveWords({ apexMm: 177.8, recessMm: 0 }, inches)).toBe('fullest 7″ over the pressed seat');
-  });
-
-  it('state the sink for a range of weights, no finer than a quarter of an inch', () => {
-    const foamGrade = { name: 'firm', densityKgM3: 42, ifd25N: 36 * 4.4482216, supportFactor: 2 };
-    const finished = { widthMm: 1000, depthMm: 450, thicknessMm: 101.6 };
-    // 4 in of 36 lb foam, support factor 2: 110 lb 0.76 in, 220 lb (0.78 × 220 × 0.7 ÷ 110 = 1.092 psi) 1.83 in.
-    expect(sinkWords({ foamGrade, finished }, { system: 'feet-inches', roundTo: 16 })).toBe(
-      'Sinks ¾″ to 1¾″ under sitters of 110 to 220\u00a0lb, give or take 30\u00a0%.',
-    );
   });
 });

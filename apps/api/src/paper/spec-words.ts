@@ -1,12 +1,9 @@
 import { formatLength, formatMass, type LengthStyle } from '@settlewright/geometry';
-import { seatSinkMm } from '@settlewright/anthropometry';
 import type { Size, SpecCushion } from './spec-pack';
 
 const KG_M3_PER_LB_FT3 = 16.018463;
 const NEWTON_PER_LBF = 4.4482216;
 const M3_PER_FT3 = 0.0283168466;
-const LIGHT_SITTER = { kg: 49.9, words: '110 to 220\u00a0lb', metric: '50 to 100\u00a0kg' };
-const HEAVY_SITTER_KG = 99.8;
 
 export const isMetric = (units: LengthStyle): boolean => units.system === 'millimetres';
 
@@ -55,24 +52,6 @@ export function volumeWords(m3: number, units: LengthStyle): string {
 
 export function massWords(kg: number, units: LengthStyle): string {
   return formatMass(kg, units);
-}
-
-/** How far the seat goes down under a range of sitters, no finer than a quarter of an inch. */
-export function sinkWords(cushion: Pick<SpecCushion, 'foamGrade' | 'finished'>, units: LengthStyle): string {
-  const { ifd25N, supportFactor } = cushion.foamGrade;
-  const foam = { ifd25N, supportFactor, thicknessMm: cushion.finished.thicknessMm };
-  const light = seatSinkMm(foam, LIGHT_SITTER.kg);
-  const heavy = seatSinkMm(foam, HEAVY_SITTER_KG);
-  const step = isMetric(units) ? 5 : 6.35;
-  const coarse = (mm: number) =>
-    formatLength(Math.max(step, Math.round(mm / step) * step), { ...units, feet: false });
-  const people = isMetric(units) ? LIGHT_SITTER.metric : LIGHT_SITTER.words;
-  const range =
-    coarse(light.sinkMm) === coarse(heavy.sinkMm)
-      ? `about ${coarse(heavy.sinkMm)}`
-      : `${coarse(light.sinkMm)} to ${coarse(heavy.sinkMm)}`;
-  const bottom = heavy.bottomsOut ? ' The heaviest of them would press it to the deck.' : '';
-  return `Sinks ${range} under sitters of ${people}, give or take 30\u00a0%.${bottom}`;
 }
 
 export function handWords(hand: SpecCushion['hand']): string {

@@ -4281,11 +4281,46 @@ export interface components {
             /** @enum {string} */
             edge?: "back" | "front" | "left" | "right";
         };
+        CushionFoamLayerDto: {
+            /** @description of the foam */
+            share: number;
+            /** @description firmness over that of the whole */
+            times: number;
+        };
+        CushionWrapDto: {
+            /** @description both faces together */
+            thicknessMm: number;
+            /** @description lost under a sitter */
+            lostMm: number;
+        };
+        TestedCushionDto: {
+            thicknessMm: number;
+            ifd25N: number;
+            supportFactor: number;
+        };
+        TestedFoamDto: {
+            /** @description by what the estimate of the drop is multiplied */
+            factor: number;
+            /** @description half the 90 % range, of the drop */
+            error: number;
+            sits: number;
+            /**
+             * Format: date
+             * @description day of the last sit
+             */
+            on: string;
+            /** @description what was sat on */
+            of: components["schemas"]["TestedCushionDto"];
+        };
         CushionFoamDto: {
             grade: string;
             densityKgM3: number;
             ifd25N: number;
             supportFactor: number;
+            /** @description from the top down */
+            layers?: components["schemas"]["CushionFoamLayerDto"][];
+            wrap?: components["schemas"]["CushionWrapDto"];
+            tested?: components["schemas"]["TestedFoamDto"];
         };
         TuftFieldDto: {
             across: number;

@@ -8,6 +8,7 @@ import type {
 } from '@settlewright/geometry';
 import { CUSHION_EDGES, HOLD_DOWNS } from '@settlewright/geometry';
 import { ApiProperty, ApiPropertyOptional } from '@nestjs/swagger';
+import { CushionFoamDto } from './cushion-foam.dto';
 import {
   CushionMakeDto,
   CushionPanelsDto,
@@ -40,17 +41,6 @@ export class CushionSizeDto {
   depthMm: number;
   @ApiProperty()
   thicknessMm: number;
-}
-
-export class CushionFoamDto {
-  @ApiProperty()
-  grade: string;
-  @ApiProperty()
-  densityKgM3: number;
-  @ApiProperty()
-  ifd25N: number;
-  @ApiProperty()
-  supportFactor: number;
 }
 
 export class CushionPlaceDto {

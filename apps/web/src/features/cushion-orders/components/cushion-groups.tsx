@@ -4,6 +4,8 @@ import {
   cushionWarningWords,
   groupCushions,
   makeWords,
+  orderDrop,
+  orderDropWords,
   outlineExtent,
   phraseText,
   wearMark,
@@ -67,6 +69,7 @@ function Facts({ spec, words }: { spec: CushionSpec; words: OrderSpec }) {
   const { making, make, foam, buttons } = spec;
   const sawn = making && outlineExtent(making.foam.outline);
   const closed = making?.closure;
+  const drop = orderDrop(spec);
   const show = (mm: number) => <Measure text={format.length(mm)} />;
   return (
     <dl className="grid content-start gap-x-8 border-t border-rule @min-[36rem]:@max-[54rem]:grid-cols-2">
@@ -86,6 +89,7 @@ function Facts({ spec, words }: { spec: CushionSpec; words: OrderSpec }) {
         {foamText(foam, format.style)}
         {words.foam !== '' && `; ${words.foam}`}
       </Row>
+      {drop && <Row name="Loaded">{orderDropWords(drop, format.style)}</Row>}
       {making && (
         <Row name="Cloth cut">
           {making.panels.map(({ name, count, cut }, i) => {

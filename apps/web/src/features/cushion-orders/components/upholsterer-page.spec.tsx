@@ -40,6 +40,7 @@ describe('the order behind a private link', () => {
     await waitFor(() => expect(group).toHaveTextContent(/± 6\smm/));
     expect(group).toHaveTextContent(/seam to seam\. .* × .*″, ± 6/);
     expect(group).toHaveTextContent(/kg\/m³, firmness \d+\sN/);
+    expect(group).toHaveTextContent(/LoadedSinks \d+\smm \(.*under 50\skg, .*\(estimate, give or take 30 %/);
     expect(group).toHaveTextContent(/\d+\smm \(\d+\.\d\sm\) for 2 seams/);
     expect(group).not.toHaveTextContent(/lb|¼″/);
   });
