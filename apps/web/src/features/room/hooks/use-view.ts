@@ -1,13 +1,13 @@
-import type { LetterCamera, NamedView } from '@settlewright/geometry';
+import type { NamedView } from '@settlewright/geometry';
 import { useCallback, useEffect, useLayoutEffect, useMemo, useRef, useState, type RefObject } from 'react';
 import { flushSync } from 'react-dom';
 import type { RoomPicture } from '../picture.ts';
-import { createRest } from '../rest.ts';
 import { union } from '../scene/bounds.ts';
 import { boundsToShow, cutThrough } from '../scene/focus.ts';
 import { createViewController, type ViewController } from '../scene/view-controller.ts';
 import { frameFor, type Cut, type Insets, type SceneView } from '../scene/views.ts';
 import { frameBox, lensFrame, type FrameBox } from '../views/lens-frame.ts';
+import { createMovingHand, handOf, START, type Hand } from './moving-hand.ts';
 
 const WIDE: Insets = { top: 74, right: 40, bottom: 56, left: 96 };
 const NARROW: Insets = { top: 62, right: 14, bottom: 30, left: 14 };
@@ -30,41 +30,6 @@ export interface View {
   panBy: (dxPx: number, dyPx: number) => void;
   turnBy: (azimuth: number, elevation: number) => void;
   fit: () => void;
-}
-
-/** What the hand did to a lettered view. */
-export interface Hand {
-  zoom: number;
-  panMm: readonly [number, number];
-  azimuth: number;
-  elevation: number;
-}
-
-const START: Hand = { zoom: 1, panMm: [0, 0], azimuth: 0.62, elevation: 0.38 };
-
-const handOf = ({ zoom, panMm, azimuthDeg, elevationDeg }: LetterCamera): Hand => ({
-  zoom,
-  panMm,
-  azimuth: (azimuthDeg * Math.PI) / 180,
-  elevation: (elevationDeg * Math.PI) / 180,
-});
-
-/** The hand while it moves the sheet: the page learns of it when it rests. */
-function createMovingHand(settle: (hand: Hand) => void) {
-  let hand = START;
-  const resting = createRest(() => settle(hand));
-  return {
-    now: () => hand,
-    move: (next: Hand) => {
-      hand = next;
-      resting.go();
-    },
-    stand: (next: Hand) => {
-      hand = next;
-      resting.stop();
-    },
-    stop: resting.stop,
-  };
 }
 
 /** The frame of the present view: letter, size of the sheet, zoom and pan put together. */
@@ -115,7 +80,7 @@ export function useView(
     return () => observer.disconnect();
   }, [sheet]);
 
-  const last = useRef<{ letter: SceneView; zoom: number } | null>(null);
+  const last = useRef<{ letter: SceneView; hand: Hand } | null>(null);
   const [moving] = useState(() => createMovingHand(setHand));
   const show = useCallback(
     (by: Hand, move: boolean) => {
@@ -130,10 +95,12 @@ export function useView(
   useLayoutEffect(() => {
     if (size.width === 0) return;
     controller.resize(size);
-    const move = last.current !== null && (last.current.letter !== letter || last.current.zoom !== hand.zoom);
-    last.current = { letter, zoom: hand.zoom };
-    moving.stand(hand);
-    show(hand, move);
+    const before = last.current;
+    last.current = { letter, hand };
+    const move = before !== null && (before.letter !== letter || before.hand.zoom !== hand.zoom);
+    // Drawn anew for another reason, the sheet stays where the hand has it.
+    if (before?.hand !== hand) moving.stand(hand);
+    show(moving.now(), move);
   }, [controller, letter, size, hand, moving, show]);
 
   useEffect(
@@ -161,6 +128,12 @@ export function useView(
     show(next, false);
   }
 
+  /** Goes there by a new page. The next step counts from it at once, as pages may come slower than steps. */
+  function goTo(next: Hand) {
+    moving.stand(next);
+    setHand(next);
+  }
+
   return {
     controller,
     cut,
@@ -169,7 +142,7 @@ export function useView(
     lensBox: camera?.kind === 'lens' && size.width > 0 ? frameBox(camera, size, insetsOf(size)) : undefined,
     zoomBy: (factor) => {
       const hand = moving.now();
-      setHand({ ...hand, zoom: Math.min(12, Math.max(0.4, hand.zoom * factor)) });
+      goTo({ ...hand, zoom: Math.min(12, Math.max(0.4, hand.zoom * factor)) });
     },
     panBy: (dxPx, dyPx) => {
       const frame = controller.frame();
@@ -187,6 +160,6 @@ export function useView(
         elevation: Math.min(1.45, Math.max(0.05, hand.elevation + elevation)),
       });
     },
-    fit: () => setHand({ ...moving.now(), zoom: 1, panMm: [0, 0] }),
+    fit: () => goTo({ ...moving.now(), zoom: 1, panMm: [0, 0] }),
   };
 }

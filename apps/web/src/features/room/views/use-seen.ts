@@ -1,7 +1,7 @@
 import type { LensCamera, NamedView, SetDocument } from '@settlewright/geometry';
 import { useEffect, useState } from 'react';
 import type { RoomAddress } from '../hooks/use-address.ts';
-import type { Hand } from '../hooks/use-view.ts';
+import type { Hand } from '../hooks/moving-hand.ts';
 import { useSurroundings } from '../room-context.tsx';
 import { VIEW_TITLES, type Cut, type SceneView } from '../scene/views.ts';
 import { useSectionCut } from '../section/section-store.ts';
