@@ -2,9 +2,9 @@ import { Canvas, useFrame, useThree } from '@react-three/fiber';
 import { lazy, Suspense, useEffect, useLayoutEffect, useMemo, useRef } from 'react';
 import { OrthographicCamera } from 'three';
 import { offerStill, type Taker } from '../export/still';
-import { drawnPicture, type DrawnPicture } from '../drawn-picture';
+import type { DrawnPicture } from '../drawn-picture';
+import { useDrawn } from '../hooks/use-drawn';
 import type { RoomPicture } from '../picture';
-import { useRoom } from '../store';
 import { BodyFigures } from './body-figures';
 import { CutCaps } from './cut-caps';
 import { followView } from './follow-view';
@@ -75,10 +75,7 @@ function aim(camera: OrthographicCamera, frame: ViewFrame, aspect: number) {
 
 /** Follows the hand in here alone: nothing of the page round the drawing is made anew for a frame. */
 function FollowingStage(props: SceneProps) {
-  const { picture } = props;
-  const moving = useRoom((state) => state.moving);
-  const drawn = useMemo(() => (moving ? drawnPicture(moving, picture) : picture), [moving, picture]);
-  return <Stage {...props} drawn={drawn} />;
+  return <Stage {...props} drawn={useDrawn(props.picture)} />;
 }
 
 function Stage({
