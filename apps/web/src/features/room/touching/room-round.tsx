@@ -50,6 +50,10 @@ export function RoomRound({ picture, placeId }: Props) {
   const pose = picture.bodies.find((body) => body.placeId === placeId)?.pose;
   const swept = useMemo(() => (envelopes && pose ? jointEnvelopes(pose, RANGES) : []), [envelopes, pose]);
   useEffect(() => showGaps({ envelopes: swept }), [swept]);
+  const rooms = useMemo(
+    () => swept.map((envelope) => ({ envelope, gap: sweptGap(envelope, picture, placeId) })),
+    [swept, picture, placeId],
+  );
   return (
     <div>
       <h3 className="font-semibold">Room round each sitter</h3>
@@ -64,10 +68,8 @@ export function RoomRound({ picture, placeId }: Props) {
         What elbows and knees sweep
       </Toggle>
       <ul>
-        {swept.map((envelope) => (
-          <li key={`${envelope.side} ${envelope.joint}`}>
-            {saySwept(envelope, sweptGap(envelope, picture, placeId), picture, style)}
-          </li>
+        {rooms.map(({ envelope, gap }) => (
+          <li key={`${envelope.side} ${envelope.joint}`}>{saySwept(envelope, gap, picture, style)}</li>
         ))}
       </ul>
       {envelopes &&
