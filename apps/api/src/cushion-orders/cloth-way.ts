@@ -1,6 +1,6 @@
 import {
   DIRECTION_WORDS,
-  NAP_WORDS,
+  napWords,
   type OrderCover,
   type OrderModel,
   type ScheduleRow,
@@ -18,7 +18,7 @@ const NAP: Record<OrderCover['nap'], ClothWay['nap']> = {
 
 /** How the cloth of the faces lies on cushions that are made alike. */
 export function clothWay(
-  { marks, covers }: ScheduleRow,
+  { marks, covers, spec }: ScheduleRow,
   { cloths }: OrderModel,
   assumed: readonly string[],
 ): ClothWay | null {
@@ -32,6 +32,9 @@ export function clothWay(
     return { direction: 'either', nap: 'none', words: 'cloth direction not said: ask before cutting' };
   }
   const { direction, nap } = own.cover;
-  const words = [`cloth ${DIRECTION_WORDS[direction]}`, nap === 'none' ? '' : NAP_WORDS[nap]].filter(Boolean);
+  const words = [
+    `cloth ${DIRECTION_WORDS[direction]}`,
+    nap === 'none' ? '' : napWords(nap, spec.kind),
+  ].filter(Boolean);
   return { direction, nap: NAP[nap], words: words.join(', ') };
 }

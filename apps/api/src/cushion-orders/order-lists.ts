@@ -2,6 +2,8 @@ import {
   CLOSURE_WORDS,
   CONSTRUCTION_WORDS,
   type CutPanel,
+  HANDEDNESS_WORDS,
+  handednessOf,
   HOLD_DOWN_WORDS,
   type LengthStyle,
   ORDER_SITTERS,
@@ -45,7 +47,7 @@ function columnsOf(
 ): { head: string; of: (row: ScheduleRow) => Cell }[] {
   return [
     { head: 'kind', of: ({ spec }) => spec.kind },
-    { head: 'hand', of: ({ hand }) => hand },
+    { head: 'hand', of: ({ spec }) => HANDEDNESS_WORDS[handednessOf(spec)] },
     { head: 'made alike', of: ({ marks }) => marks.join(' ') },
     { head: 'mirror image', of: ({ mirroredMarks }) => mirroredMarks.join(' ') },
     { head: `finished width ${unit}`, of: ({ spec }) => size(outlineExtent(spec.outline).widthMm) },

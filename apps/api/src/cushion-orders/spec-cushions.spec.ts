@@ -4,10 +4,11 @@ import {
   type CushionSpec,
   deriveCushions,
   orderModel,
+  plainCover,
   type SetDocument,
 } from '@settlewright/geometry';
 import { markedSections } from './marked-sections';
-import { specCushions } from './spec-cushions';
+import { bagLabels, specCushions } from './spec-cushions';
 
 function arrangement(id: string): SetDocument {
   const found = ARRANGEMENTS.find((one) => one.id === id);
@@ -66,6 +67,31 @@ describe('cushions on the sheets', () => {
     ]);
     expect(shown[0]!.benches).toEqual([left.benchMark, 'B91']);
     expect(shown[0]!.mirrorMarks).toEqual([seatOf(specs, 'right').mark]);
+  });
+
+  it('tell a label when only one way round is right', () => {
+    const free = seatOf(specs, 'left');
+    const loose: CushionSpec = {
+      ...free,
+      hand: 'either',
+      buttons: { ...free.buttons, columns: [], count: 0 },
+    };
+    const cut: CushionSpec = { ...loose, outline: [...loose.outline] };
+    cut.outline[0] = { ...cut.outline[0]!, at: [80, 0] };
+    expect(bagLabels([free, loose, cut]).map(({ hand }) => hand)).toEqual([
+      'LH, left hand as sat in',
+      'fits either hand',
+      'one way round, as drawn',
+    ]);
+    expect(sheetsOf([cut])[0]!.hand).toBe('one-way');
+  });
+
+  it('run their pile to the bottom edge of a back and the front edge of a seat', () => {
+    const cover = { ...plainCover('plum'), direction: 'up-roll' as const, nap: 'to-the-front' as const };
+    const shown = specCushions(orderModel({ cushions: specs, covers: [cover] }));
+    const words = (kind: 'seat' | 'back') => shown.find((one) => one.kind === kind)!.cloth!.words;
+    expect(words('seat')).toBe('cloth up the roll, nap runs to the front edge');
+    expect(words('back')).toBe('cloth up the roll, nap runs to the bottom edge');
   });
 
   it('are marked in the section, the seat below the back, without sizes', () => {

@@ -4,6 +4,8 @@ import {
   type CushionEdge,
   type CushionSpec,
   type EdgeMeets,
+  handednessOf,
+  type Handedness,
   makeWords,
   type OrderModel,
   outlineExtent,
@@ -36,14 +38,26 @@ export function specCushions(model: OrderModel, assumedCloths: readonly string[]
 
 /** A label for the bag of every cushion, in the order of their marks. */
 export function bagLabels(specs: readonly CushionSpec[]): BagLabel[] {
-  return specs.map(({ mark, benchMark, kind, place, hand }, n) => ({
-    mark,
-    place: `${benchMark}, ${kind}${place.of > 1 ? ` ${place.number} of ${place.of} from the left, seen from in front` : ''}`,
-    hand:
-      hand === 'either' ? 'fits either hand' : `${hand === 'left' ? 'LH, left' : 'RH, right'} hand as sat in`,
+  return specs.map((spec, n) => ({
+    mark: spec.mark,
+    place: placeWords(spec),
+    hand: LABEL_HAND[handednessOf(spec)],
     number: n + 1,
     count: specs.length,
   }));
+}
+
+const LABEL_HAND: Record<Handedness, string> = {
+  left: 'LH, left hand as sat in',
+  right: 'RH, right hand as sat in',
+  either: 'fits either hand',
+  'one-way': 'one way round, as drawn',
+};
+
+/** "B1, seat 1 of 2 from the left, seen from in front". */
+function placeWords({ benchMark, kind, place }: CushionSpec): string {
+  const which = place.of > 1 ? ` ${place.number} of ${place.of} from the left, seen from in front` : '';
+  return `${benchMark}, ${kind}${which}`;
 }
 
 function specCushion(row: ScheduleRow, model: OrderModel, assumedCloths: readonly string[]): SpecCushion {
@@ -56,13 +70,10 @@ function specCushion(row: ScheduleRow, model: OrderModel, assumedCloths: readonl
     benches,
     mirrorMarks,
     kind: spec.kind,
-    hand: spec.hand,
+    hand: handednessOf(spec),
     finished: spec.finishedMm,
     make: makeWords(make, spec.kind),
-    foam: row.sawnMm ?? spec.finishedMm,
     foamGrade: { ...spec.foam, name: spec.foam.grade },
-    foamVolumeM3: row.foam?.volumeM3 ?? 0,
-    foamMassKg: row.foam?.massKg ?? 0,
     ...(spec.curve && { curve: spec.curve }),
     panels: row.panels,
     ...(board && { board }),

@@ -3,6 +3,7 @@ import {
   formatLength,
   lengthStep,
   type LengthStyle,
+  marksWords,
   OFF_JOINT_MM,
   rowsWords,
 } from '@settlewright/geometry';
@@ -11,7 +12,7 @@ import { paragraph } from './paragraph';
 import { type Column, drawHead, drawRow } from './ruled-table';
 import { PEN, type Sheet } from './sheet';
 import type { SpecPack } from './spec-pack';
-import { bareLength, marksWords } from './spec-words';
+import { bareLength } from './spec-words';
 
 const ROW_MM = 4.9;
 const HEAD_MM = 16;

@@ -3,13 +3,13 @@ import {
   DIRECTION_WORDS,
   formatLength,
   type LengthStyle,
+  marksWords,
   NAP_WORDS,
 } from '@settlewright/geometry';
 import { drawRoll, rollHeights } from './cloth-roll';
 import { type OrderPage, type OrderPages, PAD } from './order-pages';
 import { paragraph } from './paragraph';
 import type { ClothOnPaper, SpecPack } from './spec-pack';
-import { marksWords } from './spec-words';
 
 /** The panels of each cloth on its roll. */
 export function drawClothSheets(pages: OrderPages, pack: SpecPack): void {

@@ -3,10 +3,14 @@ import {
   curveWords,
   cushionWarningWords,
   formatLength,
+  HANDEDNESS_WORDS,
   HOLD_DOWN_WORDS,
   lengthStep,
+  marksWords,
   outlineExtent,
+  panelCountWords,
   phraseText,
+  thicknessWords,
   TUFTING_WORDS,
 } from '@settlewright/geometry';
 import { type OrderPages, PAD } from './order-pages';
@@ -17,8 +21,6 @@ import type { Size, SpecCushion, SpecPack } from './spec-pack';
 import {
   bareLength,
   foamWords,
-  handWords,
-  marksWords,
   massWords,
   otherSystemWords,
   pairWords,
@@ -46,7 +48,7 @@ export function drawFactsColumn(
   sheet.text('FINISHED, seam to seam', x, frame.top + 5.6);
   drawHeroSize(sheet, cushion, pack, x, frame.top + 14.6);
   const tolerance = `± ${formatLength(pack.toleranceMm, { ...units, feet: false })}`;
-  const lead = `${otherSystemWords(boxOf(cushion), units)}, ${tolerance}${cushion.row.needsTemplate ? ', the box round the outline' : ''}. Thickness is the boxing between seams.`;
+  const lead = `${otherSystemWords(boxOf(cushion), units)}, ${tolerance}${cushion.row.needsTemplate ? ', the box round the outline' : ''}. ${thicknessWords(cushion.row.spec, units)}`;
   const y = paragraph(sheet, lead, x, frame.top + 20.6, width) - leading(9) + 2.2;
   const facts = factsOf(cushion, pack);
   const box = { x, y, width, labelWidth: LABEL_MM };
@@ -122,23 +124,29 @@ function factsOf(cushion: SpecCushion, pack: SpecPack): Fact[] {
   const on = cushion.benches.map((bench, i) => `${cushion.marks[i]} for ${bench}`);
   const made = `${on.slice(0, 6).join(', ')}${on.length > 6 ? ' …' : ''}`;
   const facts: [string, string][] = [
-    ['Make', `${cushion.marks.length}, ${handWords(cushion.hand)}: ${made}${mirrorWords(cushion)}`],
+    ['Make', `${cushion.marks.length}, ${HANDEDNESS_WORDS[cushion.hand]}: ${made}${mirrorWords(cushion)}`],
     ['Edges', cushion.meets],
     [
       'Foam',
-      `${sizeWords(cushion.foam, units)}, ${foamWords(cushion, units)}; ` +
-        `${volumeWords(cushion.foamVolumeM3, units)}, ${massWords(cushion.foamMassKg, units)} each`,
+      [
+        row.sawnMm && `${sizeWords(row.sawnMm, units)}, `,
+        foamWords(cushion, units),
+        row.foam && `; ${volumeWords(row.foam.volumeM3, units)}, ${massWords(row.foam.massKg, units)} each`,
+      ]
+        .filter(Boolean)
+        .join(''),
     ],
     ['Made', cushion.faults.length > 0 ? `NOT as asked: ${cushion.faults.join('; ')}` : cushion.make],
     [
       'Cut',
       panels
         .map(
-          ({ name, count, widthMm, heightMm }) => `${count} ${name} ${pairWords(widthMm, heightMm, units)}`,
+          ({ name, count, widthMm, heightMm }) =>
+            `${panelCountWords(count, name)} ${pairWords(widthMm, heightMm, units)}`,
         )
         .join('; '),
     ],
-    ['Welt', cushion.weltMm > 0 ? `seams and joins: ${runWords(cushion.weltMm, units)}` : 'none'],
+    ['Welt', weltWords(cushion, units)],
     [
       'Closure',
       closure.edgeMm > 0
@@ -169,6 +177,11 @@ function factsOf(cushion: SpecCushion, pack: SpecPack): Fact[] {
   return facts
     .filter(([, value]) => value !== '')
     .map(([label, value]) => ({ label, value: [{ text: value, weight: 600 }] }));
+}
+
+function weltWords({ weltMm, faults }: SpecCushion, units: SpecPack['units']): string {
+  if (weltMm > 0) return `seams and joins: ${runWords(weltMm, units)}`;
+  return faults.length === 0 ? 'none' : '';
 }
 
 /** Names of the cloths and what was written of them, the same thing once. */

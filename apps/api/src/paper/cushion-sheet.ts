@@ -3,7 +3,9 @@ import {
   type Construction,
   closurePath,
   formatLength,
+  HANDEDNESS_WORDS,
   lengthStep,
+  marksWords,
   OFF_JOINT_MM,
   orderDrop,
   orderDropWords,
@@ -21,7 +23,7 @@ import { type CushionPlan, planBox, type PlanPlace } from './plan-place';
 import { sectionWords } from './section-words';
 import { leading, PEN, type Sheet } from './sheet';
 import type { SpecCushion, SpecPack } from './spec-pack';
-import { bareLength, handWords, marksWords } from './spec-words';
+import { bareLength } from './spec-words';
 import { type Frame, frameOf } from './title-block';
 
 const FOOT_MM = 44;
@@ -32,7 +34,7 @@ const SUM_SIZE = 9.5;
 export function drawCushionSheet(pages: OrderPages, pack: SpecPack, cushion: SpecCushion): void {
   const topic = [
     marksWords(cushion.marks),
-    `${cushion.kind}, ${handWords(cushion.hand)}, make ${cushion.marks.length}`,
+    `${cushion.kind}, ${HANDEDNESS_WORDS[cushion.hand]}, make ${cushion.marks.length}`,
   ];
   const sheet = pages.add(topic);
   const frame = frameOf(sheet);
@@ -52,7 +54,9 @@ function drawFigures(sheet: Sheet, pack: SpecPack, cushion: SpecCushion, frame: 
     weight: 600,
   });
   const hand =
-    cushion.hand === 'either' ? 'sitter’s left is at the right' : `drawn: ${cushion.hand} hand as sat in`;
+    cushion.hand === 'left' || cushion.hand === 'right'
+      ? `drawn: ${HANDEDNESS_WORDS[cushion.hand]} as sat in`
+      : 'sitter’s left is at the right';
   sheet.text(hand, right, frame.top + 6.2, { weight: 600, align: 'right' });
   const plan = planOf(cushion, pack);
   const sums = sumLines(cushion, pack);
@@ -73,7 +77,13 @@ function drawFigures(sheet: Sheet, pack: SpecPack, cushion: SpecCushion, frame: 
   if (cushion.cloth) sheet.text(cushion.cloth.words, right, y + 5.4, { align: 'right', weight: 600 });
   drawCushionFront(
     sheet,
-    { widthMm, thicknessMm, words: frontWords(cushion, pack), thicknessWords: at.format(thicknessMm) },
+    {
+      construction: cushion.row.spec.make.construction,
+      widthMm,
+      thicknessMm,
+      words: frontWords(cushion, pack),
+      thicknessWords: at.format(thicknessMm),
+    },
     { x: at.x - box.x0 * at.factor, y: y + 9.5, factor: at.factor },
   );
   drawFoot(sheet, pack, cushion, { left, right, top: frame.bottom - FOOT_MM, scaleWords: scale });

@@ -2,6 +2,7 @@ import { drawChain } from './dimension-chain';
 import { edgeKinds, edgeProfile, type EdgeProfile } from './edge-profiles';
 import type { SectionWords } from './section-words';
 import { PEN, type Point, type Sheet } from './sheet';
+import type { SheetBox } from './taken-space';
 import type { Construction } from '@settlewright/geometry';
 
 const CROWN_MM = 6;
@@ -9,24 +10,33 @@ const CROWN_MM = 6;
 /** The cushion from the front, with its crown. */
 export function drawCushionFront(
   sheet: Sheet,
-  cushion: { widthMm: number; thicknessMm: number; words: string; thicknessWords: string },
+  cushion: {
+    construction: Construction;
+    widthMm: number;
+    thicknessMm: number;
+    words: string;
+    thicknessWords: string;
+  },
   place: { x: number; y: number; factor: number },
 ): void {
   const { x, y, factor } = place;
   const width = cushion.widthMm * factor;
   const height = cushion.thicknessMm * factor;
-  const bulge = Math.min(0.6, height / 8);
-  sheet.path(curve([x, y], [x + width / 2, y - 2 * CROWN_MM * factor], [x + width, y]), { pen: PEN.fine });
-  sheet.path(
-    [
-      [x, y],
-      [x + width, y],
-      ...curve([x + width, y], [x + width + bulge, y + height / 2], [x + width, y + height]),
-      [x, y + height],
-      ...curve([x, y + height], [x - bulge, y + height / 2], [x, y]),
-    ],
-    { pen: PEN.edge, closed: true },
-  );
+  if (cushion.construction === 'knife-edge') drawLens(sheet, { x, y, width, height });
+  else {
+    const bulge = Math.min(0.6, height / 8);
+    sheet.path(curve([x, y], [x + width / 2, y - 2 * CROWN_MM * factor], [x + width, y]), { pen: PEN.fine });
+    sheet.path(
+      [
+        [x, y],
+        [x + width, y],
+        ...curve([x + width, y], [x + width + bulge, y + height / 2], [x + width, y + height]),
+        [x, y + height],
+        ...curve([x, y + height], [x - bulge, y + height / 2], [x, y]),
+      ],
+      { pen: PEN.edge, closed: true },
+    );
+  }
   if (sheet.textWidth(cushion.words) < width - 4 && height > 4) {
     sheet.text(cushion.words, x + width / 2, y + height / 2 + 1.15, { align: 'center' });
   } else sheet.text(cushion.words, x, y + height + 4.2);
@@ -37,6 +47,19 @@ export function drawCushionFront(
     direction: 'upright',
     outwards: -1,
   });
+}
+
+/** Two faces that meet in one seam at half the height, seen along the front. */
+function drawLens(sheet: Sheet, box: SheetBox): void {
+  const { x, y, width, height } = box;
+  const [middle, right] = [y + height / 2, x + width];
+  const end = Math.min(width / 4, height * 1.5);
+  const face = (at: number): Point[] => [
+    ...curve([x, middle], [x + end / 3, at], [x + end, at]),
+    ...curve([right - end, at], [right - end / 3, at], [right, middle]),
+  ];
+  sheet.path([...face(y), ...face(y + height).reverse()], { pen: PEN.edge, closed: true });
+  sheet.line(x, middle, right, middle, { pen: PEN.hair });
 }
 
 export interface CushionSection {
@@ -157,7 +180,7 @@ function endPoint(
   const [first] = profile.seams;
   switch (what) {
     case 'top':
-      return at([4.5, -0.7]);
+      return at(profile.top);
     case 'seam':
       return at(first?.at ?? [0, 0]);
     case 'allowance':

@@ -15,6 +15,8 @@ export interface EdgeProfile {
   foam: Point[];
   /** Where pieces are sewn together; a welt sits there where there is one. */
   seams: { at: Point; inwards: Point }[];
+  /** A point of the face near this edge, where a word may point. */
+  top: Point;
   /** Middle of the strip between the seams, where a closure would be. */
   middle: Point;
   board?: { from: Point; to: Point };
@@ -77,6 +79,7 @@ export function edgeProfile(
           [reach, t],
         ],
         seams: [seam(-OFF, high, [TAIL, TAIL]), seam(-OFF, low, [TAIL, -TAIL])],
+        top: [4.5, -OFF],
         middle: [-OFF, t / 2],
         staples: [],
       };
@@ -92,6 +95,7 @@ export function edgeProfile(
         ],
         foam: [[reach, 0], ...half(1.5 * Math.PI, 0), ...half(0.5 * Math.PI, 0).reverse(), [reach, t]],
         seams: [seam(-OFF, t / 2, [1.4 * TAIL, 0])],
+        top: upper[3] ?? [t, -OFF],
         middle: [-OFF, t / 2],
         staples: [],
       };
@@ -107,6 +111,7 @@ export function edgeProfile(
         cloth: [[[reach, -OFF], ...round(OFF), [reach, t + OFF]]],
         foam: [[reach, 0], ...round(0), [reach, t]],
         seams: [],
+        top: [r, -OFF],
         middle: [-OFF, t / 2],
         staples: [],
       };
@@ -125,6 +130,7 @@ export function edgeProfile(
         ],
         foam: [[reach, 0], ...arc([r, r], [r, r], 1.5 * Math.PI, Math.PI), [0, t], [reach, t]],
         seams: [],
+        top: [r, -OFF],
         middle: [-OFF, t / 2],
         board: { from: [0.8, t], to: [reach, t + BOARD] },
         staples: [3, 5.2, 7.4].map((x): Point => [x, under]),

@@ -1,4 +1,4 @@
-import { formatLength, orderAssumptions } from '@settlewright/geometry';
+import { formatLength, HANDEDNESS_WORDS, marksWords, orderAssumptions } from '@settlewright/geometry';
 import { CHECK_BAR_MM, drawCheckBar } from './check-bar';
 import { drawDrawing } from './drawing-on-paper';
 import { type OrderPages, PAD } from './order-pages';
@@ -7,7 +7,7 @@ import { PEN, type Sheet } from './sheet';
 import type { SpecCushion, SpecPack } from './spec-pack';
 import { clothLength } from './cloth-sheets';
 import { boxOf } from './cushion-facts';
-import { foamWords, marksWords, massWords, runWords, sizeWords, volumeWords } from './spec-words';
+import { foamWords, massWords, runWords, sizeWords, volumeWords } from './spec-words';
 import { type Frame, frameOf } from './title-block';
 
 const FACTS_WIDTH_MM = 118;
@@ -226,18 +226,22 @@ function listColumns(width: number): Column[] {
 }
 
 function listRow(cushion: SpecCushion, { units }: SpecPack): string[] {
-  const show = (mm: number) => formatLength(mm, { ...units, feet: false });
+  const made = cushion.faults.length === 0;
+  const lengthOrNone = (mm: number) => {
+    if (mm > 0) return formatLength(mm, { ...units, feet: false });
+    return made ? 'none' : 'not known';
+  };
   return [
     cushion.marks.length > 1
       ? `${marksWords(cushion.marks)}: make ${cushion.marks.length}`
       : marksWords(cushion.marks),
     marksWords([...new Set(cushion.benches)]),
-    cushion.hand === 'either' ? cushion.kind : `${cushion.kind}, ${cushion.hand} hand`,
+    cushion.hand === 'either' ? cushion.kind : `${cushion.kind}, ${HANDEDNESS_WORDS[cushion.hand]}`,
     sizeWords(boxOf(cushion), units),
-    sizeWords(cushion.foam, units),
-    cushion.faults.length > 0 ? `NOT as asked: ${cushion.faults.join('; ')}` : cushion.make,
-    show(cushion.closure.edgeMm + 2 * cushion.closure.wrapMm),
-    show(cushion.weltMm),
+    cushion.row.sawnMm ? sizeWords(cushion.row.sawnMm, units) : 'not known',
+    made ? cushion.make : `NOT as asked: ${cushion.faults.join('; ')}`,
+    lengthOrNone(cushion.closure.edgeMm + 2 * cushion.closure.wrapMm),
+    lengthOrNone(cushion.weltMm),
   ];
 }
 

@@ -2,6 +2,7 @@ import type {
   ClothOfOrder,
   CushionEdge,
   Drawing,
+  Handedness,
   LaidCloth,
   LengthStyle,
   OrderModel,
@@ -53,12 +54,9 @@ export interface SpecCushion {
   mirrorMarks: readonly string[];
   kind: 'seat' | 'back';
   /** As sat in. */
-  hand: 'left' | 'right' | 'either';
+  hand: Handedness;
   finished: Size;
-  foam: Size;
   foamGrade: { name: string; densityKgM3: number; ifd25N: number; supportFactor: number };
-  foamVolumeM3: number;
-  foamMassKg: number;
   /** Of a back cushion on a curved back: apex over the pressed seat, and how far it gives way below. */
   curve?: { apexMm: number; recessMm: number };
   /** Construction, closure and welt in words. */

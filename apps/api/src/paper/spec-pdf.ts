@@ -53,7 +53,7 @@ function titleCells(pack: SpecPack, topic: readonly string[], number: number, co
       lines: [revision.issuedOn, revision.issuedBy && `by ${revision.issuedBy}`].filter(Boolean),
       widthMm: 35,
     },
-    { label: 'Sheet', lines: [`${number} of ${count}`], widthMm: 18 },
+    { label: 'Sheet', lines: [`${number} of ${count}`], widthMm: 20 },
     { label: 'Revision', lines: [revision.letter], widthMm: 18, large: true },
   ];
 }

@@ -53,12 +53,3 @@ export function volumeWords(m3: number, units: LengthStyle): string {
 export function massWords(kg: number, units: LengthStyle): string {
   return formatMass(kg, units);
 }
-
-export function handWords(hand: SpecCushion['hand']): string {
-  return hand === 'either' ? 'no hand' : `${hand} hand`;
-}
-
-export function marksWords(marks: readonly string[]): string {
-  if (marks.length <= 6) return marks.join(', ');
-  return `${marks[0]} to ${marks.at(-1)}, ${marks.length} in all`;
-}

@@ -1,11 +1,16 @@
-import { buttonSpots, type OutlineCorner, type Point2 } from '@settlewright/geometry';
+import {
+  buttonSpots,
+  HANDEDNESS_WORDS,
+  marksWords,
+  type OutlineCorner,
+  type Point2,
+} from '@settlewright/geometry';
 import { TILE_OVERLAP_MM } from '@settlewright/geometry/export';
 import { drawCornerTables } from './corner-table';
 import { type OrderPages, PAD } from './order-pages';
 import { paragraph } from './paragraph';
 import { PEN, type Sheet } from './sheet';
 import type { SpecCushion, SpecPack } from './spec-pack';
-import { handWords, marksWords } from './spec-words';
 import {
   stretchesIn,
   type TemplateLines,
@@ -38,7 +43,7 @@ function drawTemplate(pages: OrderPages, pack: SpecPack, cushion: SpecCushion): 
   const marks = marksWords(cushion.marks);
   const topic = [
     `Template ${marks}`,
-    `${cushion.kind}, ${handWords(cushion.hand)}, make ${cushion.marks.length}`,
+    `${cushion.kind}, ${HANDEDNESS_WORDS[cushion.hand]}, make ${cushion.marks.length}`,
   ];
   const page = pages.page(topic, `Template ${marks}, key`, 'print at 100 %, never “fit to page”');
   const space = tileSpace(page.sheet);
@@ -156,7 +161,7 @@ function drawTile(sheet: Sheet, { pack, cushion, lines, tile, tiles, space }: Ti
   drawTileSquare(sheet, lines, tile, { ...frame, bottom: frame.top + space.heightMm });
   const foot = frame.top + space.heightMm;
   sheet.line(frame.left, foot, frame.right, foot, { pen: PEN.fine });
-  const words = `${marksWords(cushion.marks)}, revision ${pack.revision.letter}, ${handWords(cushion.hand)}. Solid: FINISHED, seam to seam. Dashed: cut line.`;
+  const words = `${marksWords(cushion.marks)}, revision ${pack.revision.letter}, ${HANDEDNESS_WORDS[cushion.hand]}. Solid: FINISHED, seam to seam. Dashed: cut line.`;
   sheet.text(tile.name, frame.left + PAD, foot + 6, { size: 15, weight: 600 });
   sheet.text(words, frame.left + PAD + 18, foot + 5.4);
   sheet.text('Check one square before cutting.', frame.right - PAD, foot + 5.4, { align: 'right' });

@@ -4,6 +4,7 @@ import type { LengthStyle } from '../units/length-style.ts';
 import { phraseText } from '../units/phrase.ts';
 import { HOLD_DOWN_WORDS, type CushionChoice, type CushionEdge } from './cushion-choice.ts';
 import type { CushionShape } from './cushion-shape.ts';
+import type { CushionSpec } from './cushion-spec.ts';
 import type { RunJoints } from './run-joints.ts';
 import { CLOSURE_WORDS, CONSTRUCTION_WORDS, WELT_WORDS, type CushionMake } from './making/cushion-make.ts';
 import { TUFTING_WORDS, type TuftingChoice } from './tufting-choice.ts';
@@ -33,6 +34,45 @@ export function makeWords(
   const closed =
     closure === 'stapled' ? CLOSURE_WORDS.stapled : `${CLOSURE_WORDS[closure]} at the ${edge} edge`;
   return `${CONSTRUCTION_WORDS[construction]}, ${closed}, ${WELT_WORDS[welt]}`;
+}
+
+/**
+ * What the thickness of a cushion is measured between.
+ *
+ * @param spec - the cushion
+ * @param style - units in which lengths are shown
+ * @returns a sentence
+ */
+export function thicknessWords(
+  { make, making }: Pick<CushionSpec, 'make' | 'making'>,
+  style: LengthStyle,
+): string {
+  switch (make.construction) {
+    case 'boxed':
+      return 'Thickness is the boxing between seams.';
+    case 'tight-boxed':
+      return making
+        ? `Thickness is the foam; the boxing between seams is ${formatLength(making.edgeHeightMm, { ...style, feet: false })}.`
+        : 'Thickness is the foam.';
+    case 'knife-edge':
+      return 'Thickness is the foam in the middle.';
+    case 'waterfall':
+    case 'bullnose':
+      return 'Thickness is the sides between seams.';
+    case 'plywood-backed':
+      return 'Thickness is the foam; the board is under it.';
+  }
+}
+
+/**
+ * How many of a panel are cut: "2 plates", "1 boxing".
+ *
+ * @param count - of panels alike
+ * @param name - of one
+ */
+export function panelCountWords(count: number, name: string): string {
+  if (count === 1) return `1 ${name}`;
+  return `${count} ${name.endsWith('half') ? name.replace(/half$/, 'halves') : `${name}s`}`;
 }
 
 /**

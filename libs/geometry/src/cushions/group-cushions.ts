@@ -1,8 +1,9 @@
 import type { OutlineCorner } from '../outlines/outline.ts';
 import type { CushionEdge } from './cushion-choice.ts';
 import type { CushionGroup, CushionSpec } from './cushion-spec.ts';
+import { buttonSpots } from './cushion-warnings.ts';
 import { mirroredOutline, otherEdge } from './mirrored-shape.ts';
-import { mirroredWear } from './wear.ts';
+import { mirroredWear, type WearArea } from './wear.ts';
 
 /** Lengths are compared on a grid of 1/64 in: fractions of an inch lie on it, so noise of the last digit never parts two. */
 const GRID_MM = 25.4 / 64;
@@ -29,12 +30,51 @@ function likeness(spec: CushionSpec, mirrored: boolean): string {
     boardLinesMm,
     cameraSides: spec.cameraSides.map(edge).sort(),
     holdDown: spec.holdDown,
-    wear: mirrored ? spec.wear?.map(mirroredWear) : spec.wear,
+    wear: spec.wear?.map((area) => wearLikeness(mirrored ? mirroredWear(area) : area)),
     notes: spec.notes,
   };
-  return JSON.stringify(shown, (_key, value: unknown) =>
+  return onGrid(shown);
+}
+
+/** What is said of a marked area, whatever the order it was written in. */
+const wearLikeness = ({ place, look, note, areaMm }: WearArea) => [
+  place,
+  look,
+  note,
+  areaMm && [areaMm.fromEnd, areaMm.fromSideMm, areaMm.fromFrontMm, areaMm.widthMm, areaMm.depthMm],
+];
+
+const onGrid = (shown: unknown): string =>
+  JSON.stringify(shown, (_key, value: unknown) =>
     typeof value === 'number' ? Math.round(value / GRID_MM) : value,
   );
+
+/**
+ * Whether a cushion and its mirror image are the same: in plan, closure, buttons and marked wear. What it lies against does
+ * not count.
+ *
+ * @param spec - from `deriveCushions`
+ */
+export function isMirrorOfItself(spec: CushionSpec): boolean {
+  const { outline, make, wear } = spec;
+  const xs = outline.map(({ at }) => at[0]);
+  const both = Math.min(...xs) + Math.max(...xs);
+  const spots = buttonSpots(spec);
+  const places = (list: readonly (readonly [number, number])[]) =>
+    list.map(([x, y]) => `${Math.round(x / GRID_MM)} ${Math.round(y / GRID_MM)}`).sort();
+  const made = {
+    outline: fromLowest(outline),
+    edge: make.closureEdge,
+    spots: places(spots),
+    wear: wear?.map((area) => onGrid(wearLikeness(area))).sort(),
+  };
+  const mirrored = {
+    outline: fromLowest(mirroredOutline(outline)),
+    edge: otherEdge(make.closureEdge),
+    spots: places(spots.map(([x, y]) => [both - x, y] as const)),
+    wear: wear?.map((area) => onGrid(wearLikeness(mirroredWear(area)))).sort(),
+  };
+  return onGrid(made) === onGrid(mirrored);
 }
 
 /** The same outline from its lowest corner on, the leftmost of those. */

@@ -110,6 +110,9 @@ describe('a set with marked cushions', () => {
     expect(groupOf(one).mirroredMarks).toEqual([]);
     const both = chooseCushion(one, keyOf(pair.mirroredMarks[0]), { wear: [mirroredWear(AREA)] });
     expect(groupOf(both).mirroredMarks).toContain(pair.mirroredMarks[0]);
+    const { look, ...rest } = mirroredWear(AREA);
+    const inAnotherOrder = chooseCushion(one, keyOf(pair.mirroredMarks[0]), { wear: [{ ...rest, look }] });
+    expect(groupOf(inAnotherOrder).mirroredMarks).toContain(pair.mirroredMarks[0]);
     expect(mirroredWear({ place: 'left-end', look: 'patch' }).place).toBe('right-end');
   });
 

@@ -76,9 +76,9 @@ export function orderModel(input: {
     ),
     faults: [
       ...cushions.flatMap(({ mark, faults }) => faults.map((text) => ({ mark, text }))),
-      ...[...coverFaults(covers, cushions), ...cloths.flatMap(({ faults }) => faults)].map((text) => ({
-        text,
-      })),
+      ...[...new Set([...coverFaults(covers, cushions), ...cloths.flatMap(({ faults }) => faults)])].map(
+        (text) => ({ text }),
+      ),
     ],
     warnings: cushions.flatMap(({ mark, warnings }) => warnings.map((warning) => ({ mark, warning }))),
   };

@@ -1,7 +1,9 @@
 import { CHART_DIFFERS } from '../cloth/cloth-to-buy.ts';
+import type { FullnessRule } from '../cushions/tufting.ts';
 import { formatLength } from '../units/format-length.ts';
 import type { LengthStyle } from '../units/length-style.ts';
 import type { ClothOfOrder, LaidCloth } from './order-cloth.ts';
+import { marksWords } from './marks-words.ts';
 import type { OrderCover } from './order-cover.ts';
 import type { ButtonSheet, OrderModel } from './order-model.ts';
 
@@ -22,6 +24,15 @@ export const NAP_WORDS: Record<OrderCover['nap'], string> = {
 };
 
 /**
+ * Where the pile runs on a cushion; a back has a top and a bottom edge.
+ *
+ * @param nap - of its cloth
+ * @param kind - of the cushion
+ */
+export const napWords = (nap: OrderCover['nap'], kind: 'seat' | 'back'): string =>
+  kind === 'seat' ? NAP_WORDS[nap] : NAP_WORDS[nap].replace('front', 'bottom').replace('back', 'top');
+
+/**
  * What an order takes as given.
  *
  * @param model - of the order
@@ -30,15 +41,17 @@ export const NAP_WORDS: Record<OrderCover['nap'], string> = {
  */
 export function orderAssumptions({ schedule, cloths, buttons }: OrderModel, style: LengthStyle): string[] {
   const show = (mm: number) => formatLength(mm, { ...style, feet: false });
-  const some = (is: (row: OrderModel['schedule'][number]) => boolean) => schedule.some(is);
+  const tufted = (rule: FullnessRule) => {
+    const marks = schedule.flatMap(({ spec, marks }) => (spec.tufting.fullness === rule ? marks : []));
+    return marksWords(marks);
+  };
+  const [halfAgain, foamThick] = [tufted('half-again'), tufted('foam-thickness')];
   return [
     'Sizes are finished, seam to seam, flat, before the foam swells them. Foam and cover sizes follow from them.',
     'New foam on a flat, rigid deck, at room temperature.',
-    ...(some(({ spec }) => spec.tufting.fullness === 'half-again')
-      ? ['Tufted faces have 1½ of cloth for every 1 of panel.']
-      : []),
-    ...(some(({ spec }) => spec.tufting.fullness === 'foam-thickness')
-      ? ['Tufted faces have as much more cloth, at each end of a tuft, as its buttons go in.']
+    ...(halfAgain ? [`Tufted faces of ${halfAgain} have 1½ of cloth for every 1 of panel.`] : []),
+    ...(foamThick
+      ? [`Tufted faces of ${foamThick} have as much more cloth, at each end of a tuft, as its buttons go in.`]
       : []),
     ...(buttons.some(({ seat }) => seat)
       ? ['Rows over the seat are over the seat as a sitter of 77 kg (170 lb) presses it.']
