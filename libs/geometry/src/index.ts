@@ -113,6 +113,7 @@ export { saidOfCushion, SAID_OF_CUSHION, type SaidOfCushion } from './orders/sai
 export type { ClothLayout, ClothPanel, PlacedPanel } from './cloth/cloth.ts';
 export { nestPanels } from './cloth/nest-panels.ts';
 export * from './outlines/outline.ts';
+export { halfOutline } from './outlines/half-outline.ts';
 export { curveWords } from './cushions/curve-words.ts';
 export { deriveCushions } from './cushions/derive-cushions.ts';
 export { marksWords } from './orders/marks-words.ts';

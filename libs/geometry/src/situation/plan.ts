@@ -1,5 +1,6 @@
 import { partPieces } from '../drawing/part-pieces.ts';
 import { convexOutline } from '../drawing/solid-outline.ts';
+import { halfOutline } from '../outlines/half-outline.ts';
 import type { Part } from '../parts/part.ts';
 
 /** A point seen from above: two level axes, millimetres. */
@@ -194,25 +195,10 @@ export function clippedLine(outline: PlanOutline, window: PlanWindow): PlanOutli
     [1, window.ahead],
   ] as const) {
     if (limits === undefined) continue;
-    rest = half(rest, axis, limits[0], 1);
-    rest = half(rest, axis, limits[1], -1);
+    rest = halfOutline(rest, axis, limits[0], 1);
+    rest = halfOutline(rest, axis, limits[1], -1);
   }
   return rest;
-}
-
-/** Keeps what lies on the side of `limit` that `sign` points to. */
-function half(outline: PlanOutline, axis: 0 | 1, limit: number, sign: 1 | -1): PlanOutline {
-  const kept: PlanPoint[] = [];
-  outline.forEach((point, i) => {
-    const next = outline[(i + 1) % outline.length] ?? point;
-    const here = sign * (point[axis] - limit);
-    const there = sign * (next[axis] - limit);
-    if (here >= 0) kept.push(point);
-    if (here >= 0 === there >= 0 || here === there) return;
-    const t = here / (here - there);
-    kept.push([point[0] + (next[0] - point[0]) * t, point[1] + (next[1] - point[1]) * t]);
-  });
-  return kept;
 }
 
 /**

@@ -1,3 +1,5 @@
+import { halfOutline } from '@settlewright/geometry';
+
 /** Across and down from the middle of the cushion, mm. */
 export type Point = readonly [number, number];
 
@@ -49,16 +51,6 @@ export function withinMm(outline: readonly Point[], u: number, v: number): numbe
   return nearest;
 }
 
-/** The part of an outline on one side of a line across (axis 0) or down (axis 1) the panel. */
-function cut(outline: readonly Point[], axis: 0 | 1, at: number, keep: 1 | -1): Point[] {
-  return outline.flatMap((a, n) => {
-    const b = outline[(n + 1) % outline.length]!;
-    const [over, next] = [(a[axis] - at) * keep, (b[axis] - at) * keep];
-    const kept = over >= 0 ? [a] : [];
-    return over * next < 0 ? [...kept, between(a, b, over / (over - next))] : kept;
-  });
-}
-
 /** Lines of the squares that cross a stretch. */
 function linesWithin(low: number, high: number, step: number): number[] {
   const first = Math.floor(low / step) + 1;
@@ -70,10 +62,10 @@ export function strips(outline: readonly Point[], axis: 0 | 1, step: number): Po
   const values = outline.map((point) => point[axis]);
   const lines = linesWithin(Math.min(...values), Math.max(...values), step);
   const pieces: Point[][] = [];
-  let rest = [...outline];
+  let rest: Point[] = [...outline];
   for (const at of lines) {
-    pieces.push(cut(rest, axis, at, -1));
-    rest = cut(rest, axis, at, 1);
+    pieces.push(halfOutline(rest, axis, at, -1));
+    rest = halfOutline(rest, axis, at, 1);
   }
   return [...pieces, rest].filter(({ length }) => length > 2);
 }
