@@ -54,10 +54,14 @@ export function sayFreer({ past, insteadOf, tightest }: FreerWay, { name, length
   return `The widest way leads past ${joinWords(insteadOf.map(name))} once seated. Or past ${whom}, ${room}.`;
 }
 
-/** Of whom nothing is known here: neither how they get in nor whether others get past them. */
+/** Neither how they get in nor whether others get past them. */
+const nothingKnownOf = (names: readonly string[]): string =>
+  `Not known: how ${joinWords(names)} ${names.length === 1 ? 'gets' : 'get'} in, and whether others get past.`;
+
+/** Of whom nothing is known here. */
 export const sayLeftOut = (names: readonly string[]): string =>
-  `Not known: how ${joinWords(names)} ${names.length === 1 ? 'gets' : 'get'} in, and whether others get past. Their measures are not known here.`;
+  `${nothingKnownOf(names)} Their measures are not known here.`;
 
 /** Why nothing is said of children: their breadths and depths are borrowed for the drawing. */
 export const sayChildren = (names: readonly string[]): string =>
-  `Not known: how ${joinWords(names)} ${names.length === 1 ? 'gets' : 'get'} in, and whether others get past. Of a child only height, weight and lower leg are known; how broad and deep it is drawn is for scale.`;
+  `${nothingKnownOf(names)} Of a child only height, weight and lower leg are known; how broad and deep it is drawn is for scale.`;
