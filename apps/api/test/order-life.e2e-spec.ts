@@ -361,8 +361,19 @@ describe('the life of a cushion order', () => {
       expect(await byShop(order, 'state', { to: 'closed' }, 409)).toMatchObject({
         code: 'delivery-not-accepted',
       });
-      await inspect(order, 'accepted', measured(finishedMm.widthMm));
+      const rest = { note: 'The others were measured on the bench.' };
+      await inspect(order, 'accepted', { ...measured(finishedMm.widthMm), ...rest });
       await byShop(order, 'state', { to: 'closed' });
+    });
+
+    it('of a delivery takes no cushion for right that is not on the sheet', async () => {
+      const order = await shipped();
+      const part = { kind: 'received' };
+      expect(await inspect(order, 'accepted', part, 400)).toMatchObject({
+        fields: [{ path: 'note', code: 'reason-missing' }],
+      });
+      await inspect(order, 'accepted', { ...part, note: 'The others come on Friday.' });
+      expect(await stateOf(order)).toBe('received');
     });
 
     it('is refused while there is nothing to inspect, or of a cushion that was not ordered', async () => {

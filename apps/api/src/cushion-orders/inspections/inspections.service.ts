@@ -1,4 +1,4 @@
-import { formatLength, type LengthStyle } from '@settlewright/geometry';
+import { type CushionSpec, formatLength, type LengthStyle, marksWords } from '@settlewright/geometry';
 import { Injectable } from '@nestjs/common';
 import { In } from 'typeorm';
 import type { MemberInfo } from '../../common/access.decorator';
@@ -40,9 +40,10 @@ export class InspectionsService {
     return this.acts.byMember(member, place, async (act) => {
       const { manager, order } = act;
       requireAtHand(act, dto.kind);
-      const rows = await this.rows(act, dto);
+      const ordered = await this.cushions.of(order);
+      const rows = rowsOf(ordered, dto);
       const toleranceMm = toleranceOf(order.sent);
-      requireReason(dto, rows, toleranceMm);
+      requireReason(dto, doubtfulMarks(ordered, rows, dto.kind, toleranceMm));
       await requirePhotos(act, dto.photoIds ?? []);
       const { kind, outcome } = dto;
       const note = dto.note ?? '';
@@ -71,22 +72,35 @@ export class InspectionsService {
       });
     });
   }
+}
 
-  private async rows(act: OrderAct, dto: InspectDto): Promise<InspectedCushion[]> {
-    const cushions = await this.cushions.of(act.order);
-    return dto.cushions.map((row, index) => {
-      requireMark(cushions, row.mark, `cushions.${index}.mark`);
-      const finished = cushions.find(({ mark }) => mark === row.mark)?.finishedMm;
-      if (!finished) throw Problem.notFound('cushion');
-      const { widthMm, depthMm, thicknessMm } = finished;
-      const measured = {
-        widthMm: row.widthMm ?? null,
-        depthMm: row.depthMm ?? null,
-        thicknessMm: row.thicknessMm ?? null,
-      };
-      return { mark: row.mark, asked: { widthMm, depthMm, thicknessMm }, measured, note: row.note ?? '' };
-    });
-  }
+function rowsOf(ordered: readonly CushionSpec[], dto: InspectDto): InspectedCushion[] {
+  return dto.cushions.map((row, index) => {
+    requireMark(ordered, row.mark, `cushions.${index}.mark`);
+    const finished = ordered.find(({ mark }) => mark === row.mark)?.finishedMm;
+    if (!finished) throw Problem.notFound('cushion');
+    const { widthMm, depthMm, thicknessMm } = finished;
+    const measured = {
+      widthMm: row.widthMm ?? null,
+      depthMm: row.depthMm ?? null,
+      thicknessMm: row.thicknessMm ?? null,
+    };
+    return { mark: row.mark, asked: { widthMm, depthMm, thicknessMm }, measured, note: row.note ?? '' };
+  });
+}
+
+/** Cushions that are out or were not measured; of a delivery also those that are not on the sheet. */
+function doubtfulMarks(
+  ordered: readonly CushionSpec[],
+  rows: readonly InspectedCushion[],
+  kind: InspectionKind,
+  toleranceMm: number,
+): string[] {
+  const within = new Set(
+    rows.filter((row) => judgeCushion(judgeSizes(row, toleranceMm)) === 'within').map(({ mark }) => mark),
+  );
+  const asked = kind === 'received' ? ordered : rows;
+  return asked.map(({ mark }) => mark).filter((mark) => !within.has(mark));
 }
 
 function requireAtHand({ order }: OrderAct, kind: InspectionKind): void {
@@ -99,14 +113,13 @@ function requireAtHand({ order }: OrderAct, kind: InspectionKind): void {
 }
 
 /** Unknown is never a pass: accepting what is out or was not measured asks for a word on it. */
-function requireReason(dto: InspectDto, rows: readonly InspectedCushion[], toleranceMm: number): void {
+function requireReason(dto: InspectDto, doubtful: readonly string[]): void {
   if ((dto.note ?? '') !== '') return;
-  const doubtful = rows.filter((row) => judgeCushion(judgeSizes(row, toleranceMm)) !== 'within');
   if (dto.outcome === 'accepted' && doubtful.length === 0) return;
   const message =
     dto.outcome === 'rejected'
       ? 'say why it is rejected'
-      : `${doubtful.map(({ mark }) => mark).join(', ')} is out or was not measured: say why it is accepted`;
+      : `${marksWords(doubtful)} ${doubtful.length === 1 ? 'is out or was' : 'are out or were'} not measured: say why it is accepted`;
   throw Problem.invalid([{ path: 'note', code: 'reason-missing', message }]);
 }
 
