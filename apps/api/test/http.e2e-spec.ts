@@ -122,6 +122,12 @@ describe('the web application', () => {
     expect(answer.get('Cache-Control')).toBe('no-cache');
   });
 
+  it('asks search engines to leave the page of a private link alone', async () => {
+    const robots = async (path: string) => (await http().get(path).expect(200)).headers['x-robots-tag'];
+    expect(await robots('/order/any-token')).toBe('noindex, nofollow, noarchive');
+    expect(await robots('/w/one/p/two/orders/three')).toBeUndefined();
+  });
+
   it('has files that never change, and no page in place of a missing one', async () => {
     const file = await http().get('/assets/app-1a2b.js').expect(200);
     expect(file.get('Cache-Control')).toBe('public, max-age=31536000, immutable');

@@ -3,6 +3,9 @@ import { join, sep } from 'node:path';
 import type { NestExpressApplication } from '@nestjs/platform-express';
 import type { NextFunction, Request, Response } from 'express';
 
+/** A private link is the key to what it shows: nobody lists it. */
+const PRIVATE_PAGE = /^\/+order\//i;
+export const NOT_LISTED = 'noindex, nofollow, noarchive';
 const NO_PAGE = /^\/+(api|assets)(\/|$)/i;
 
 /**
@@ -24,6 +27,7 @@ export function serveWebApp(app: NestExpressApplication, webDist: string): void 
       return;
     }
     response.setHeader('Cache-Control', 'no-cache');
+    if (PRIVATE_PAGE.test(request.path)) response.setHeader('X-Robots-Tag', NOT_LISTED);
     response.sendFile(join(webDist, 'index.html'), { cacheControl: false });
   });
 }
