@@ -22,6 +22,9 @@ describe('the schedule as a list', () => {
       expect(Number(cell(lines[i]!, 'foam width in'))).toBeCloseTo(row.sawnMm!.widthMm / 25.4, 4);
       expect(Number(cell(lines[i]!, 'buttons'))).toBe(row.spec.buttons.count);
     });
+    const { densityKgM3, ifd25N } = data.model.schedule[0]!.spec.foam;
+    expect(Number(cell(lines[0]!, 'foam density lb/ft3'))).toBeCloseTo(densityKgM3 / 16.018463, 2);
+    expect(Number(cell(lines[0]!, 'foam 25 % IFD lb'))).toBeCloseTo(ifd25N / 4.4482216, 2);
     expect(cell(lines[0]!, 'template')).toBe('yes');
     const inMm = readCsvRows(scheduleCsv(metric)).rows.map(({ cells }) => cells);
     expect(Number(inMm[1]![inMm[0]!.indexOf('finished depth mm')])).toBeCloseTo(

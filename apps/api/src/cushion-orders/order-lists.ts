@@ -2,6 +2,8 @@ import {
   CLOSURE_WORDS,
   CONSTRUCTION_WORDS,
   type CutPanel,
+  foamNumber,
+  foamUnit,
   HANDEDNESS_WORDS,
   handednessOf,
   HOLD_DOWN_WORDS,
@@ -57,8 +59,7 @@ function columnsOf(
     { head: `foam depth ${unit}`, of: ({ sawnMm }) => size(sawnMm?.depthMm) },
     { head: `foam thickness ${unit}`, of: ({ sawnMm }) => size(sawnMm?.thicknessMm) },
     { head: 'foam', of: ({ spec }) => spec.foam.grade },
-    { head: 'foam density kg/m3', of: ({ spec }) => spec.foam.densityKgM3 },
-    { head: 'foam 25 % IFD N', of: ({ spec }) => spec.foam.ifd25N },
+    ...foamColumns(unit === 'mm' ? 'millimetres' : 'feet-inches'),
     ...dropColumns(size, unit),
     { head: 'construction', of: ({ spec }) => CONSTRUCTION_WORDS[spec.make.construction] },
     { head: 'closure', of: ({ spec }) => CLOSURE_WORDS[spec.make.closure] },
@@ -74,6 +75,21 @@ function columnsOf(
     { head: 'template', of: ({ needsTemplate }) => needsTemplate },
     { head: 'notes', of: ({ spec }) => spec.notes },
     { head: 'not as asked', of: ({ spec }) => spec.faults.join('; ') },
+  ];
+}
+
+/** Density and firmness in the units that go with the lengths. */
+function foamColumns(system: LengthStyle['system']): ReturnType<typeof columnsOf> {
+  const style = { system };
+  const plain = (what: 'density' | 'firmness', value: number): Cell =>
+    Number(foamNumber(what, value, style).toFixed(2));
+  const densityUnit = foamUnit('density', style).replace('³', '3');
+  return [
+    { head: `foam density ${densityUnit}`, of: ({ spec }) => plain('density', spec.foam.densityKgM3) },
+    {
+      head: `foam 25 % IFD ${foamUnit('firmness', style)}`,
+      of: ({ spec }) => plain('firmness', spec.foam.ifd25N),
+    },
   ];
 }
 

@@ -125,9 +125,13 @@ function drawRows(
 function offWords({ alignedTo }: ButtonSheet, offMm: number, beyond: boolean, units: LengthStyle): string {
   if (alignedTo === 'board-centres') return 'on a board’s middle';
   const step = lengthStep(units);
-  if (Math.round(Math.abs(offMm) / step) === 0) return 'on it';
+  const off = Math.abs(offMm);
+  if (Math.round(off / step) === 0) return 'on it';
   const way = offMm < 0 ? 'towards the datum' : 'away from it';
-  return `${beyond ? 'CHECK ' : ''}${bareLength(Math.abs(offMm), units)} ${way}`;
+  if (!beyond) return `${bareLength(off, units)} ${way}`;
+  // Rounded to the limit itself, it would seem to keep to it.
+  const over = Math.round(off / step) * step <= OFF_JOINT_MM + 1e-6 ? 'over ' : '';
+  return `CHECK ${over}${bareLength(off, units)} ${way}`;
 }
 
 const rounded = (mm: number, units: LengthStyle): string => {
