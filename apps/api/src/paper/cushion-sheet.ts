@@ -3,6 +3,7 @@ import {
   type Construction,
   closurePath,
   formatLength,
+  FRONT_EDGE_WORDS,
   HANDEDNESS_WORDS,
   lengthStep,
   marksWords,
@@ -149,9 +150,9 @@ function frontWords({ row: { spec }, finished }: SpecCushion, { units }: SpecPac
   const words: Record<Construction, string> = {
     boxed: `boxing ${strip} between seams; ${crown}`,
     'tight-boxed': `boxing ${strip} between seams, tight over the foam`,
-    'knife-edge': 'knife edge: one seam at half the height',
-    waterfall: `front in one piece with top and bottom; ${crown}`,
-    bullnose: `half-round front in one piece; ${crown}`,
+    'knife-edge': FRONT_EDGE_WORDS['knife-edge'],
+    waterfall: `${FRONT_EDGE_WORDS.waterfall}; ${crown}`,
+    bullnose: `${FRONT_EDGE_WORDS.bullnose}; ${crown}`,
     'plywood-backed': 'cover pulled round the board and stapled under it',
   };
   return words[spec.make.construction];

@@ -1,34 +1,15 @@
-import type { CushionEdge } from '../cushions/cushion-choice.ts';
-import type { CushionSpec, EdgeMeets } from '../cushions/cushion-spec.ts';
+import type { CushionSpec } from '../cushions/cushion-spec.ts';
 import { buttonSpots } from '../cushions/cushion-warnings.ts';
 import { closurePath } from '../cushions/making/edge-strip.ts';
 import { wearHatch, wearRectangle } from '../cushions/wear-hatch.ts';
 import { wearMark } from '../cushions/wear.ts';
-import {
-  offsetFault,
-  offsetOutline,
-  outlinePoints,
-  outlineStretches,
-  type OutlineCorner,
-} from '../outlines/outline.ts';
+import { offsetFault, offsetOutline, outlinePoints, type OutlineCorner } from '../outlines/outline.ts';
 import { WELT_MM } from './cushion-views.ts';
 import { datumChain, dimensionChain } from './dimension-chain.ts';
 import { drawingOf, type Drawing, type DrawShape, type PagePoint } from './drawing.ts';
+import { EDGE_WORDS, edgeWords } from './plan-edges.ts';
 
 const BUTTON_RADIUS_MM = 11;
-
-const EDGE_WORDS: Record<EdgeMeets, string> = {
-  wall: 'wall',
-  'end-wall': 'end wall',
-  arm: 'arm',
-  neighbour: 'next cushion',
-  'corner-cushion': 'cushion of the other leg',
-  free: 'free end',
-  'back-pad': 'back edge, meets the back pad',
-  front: 'front edge',
-  'seat-cushion': 'lower edge, meets the seat cushion',
-  top: 'top edge',
-};
 
 /** A cushion from above, back edge up: board lines, seams, zip, wall, buttons, words and chains. */
 export function cushionPlan(spec: CushionSpec, labelMm: number): Drawing {
@@ -66,11 +47,11 @@ export function cushionPlan(spec: CushionSpec, labelMm: number): Drawing {
 const onPage = (corners: readonly OutlineCorner[], depthMm: number): PagePoint[] =>
   outlinePoints(corners, 0.5).map(([x, y]): PagePoint => [x, depthMm - y]);
 
-/** What is to look used, hatched and numbered; a number stands in a corner that no edge is named in. */
+/** What is to look used, hatched and numbered; a number stands where no edge is named. */
 function wearShapes(spec: CushionSpec, labelMm: number): DrawShape[] {
   const d = spec.finishedMm.depthMm;
   return (spec.wear ?? []).flatMap((area, i): DrawShape[] => {
-    const { x0, y1 } = wearRectangle(spec, area);
+    const { x0, x1, y1 } = wearRectangle(spec, area);
     const lines = wearHatch(spec, area, labelMm / 4);
     if (lines.length === 0) return [];
     return [
@@ -79,7 +60,12 @@ function wearShapes(spec: CushionSpec, labelMm: number): DrawShape[] {
         points: line.map(([x, y]): PagePoint => [x, d - y]),
         pen: 'hair',
       })),
-      { kind: 'text', at: [x0 + labelMm / 2, d - y1 + labelMm / 3], text: wearMark(i), anchor: 'middle' },
+      {
+        kind: 'text',
+        at: [x0 + Math.min((x1 - x0) / 2, 1.3 * labelMm), d - y1 + labelMm / 3],
+        text: wearMark(i),
+        anchor: 'middle',
+      },
     ];
   });
 }
@@ -157,36 +143,6 @@ function wallShapes(spec: CushionSpec, labelMm: number): DrawShape[] {
       upright: true,
     },
   ];
-}
-
-function edgeWords(spec: CushionSpec, labelMm: number): DrawShape[] {
-  const { widthMm: w, depthMm: d } = spec.finishedMm;
-  const inset = WELT_MM + labelMm / 3;
-  const words = (at: PagePoint, text: string, upright?: true): DrawShape => ({
-    kind: 'text',
-    at,
-    text,
-    anchor: 'middle',
-    ...(upright ? { upright } : {}),
-  });
-  const closed = spec.make.closure === 'zip' ? 'zip' : 'closure';
-  const named = (edge: CushionEdge, text: string): string =>
-    spec.make.closureEdge === edge && (spec.making?.closure.edgeMm ?? 0) > 0 ? `${text}, ${closed}` : text;
-  return [
-    words([middleX(spec, 'back'), inset], named('back', EDGE_WORDS[spec.edges.back])),
-    words([middleX(spec, 'front'), d - inset], named('front', EDGE_WORDS[spec.edges.front])),
-    words([inset, d / 2], named('right', `${EDGE_WORDS[spec.edges.right]}, sitter’s right`), true),
-    words([w - inset, d / 2], named('left', `${EDGE_WORDS[spec.edges.left]}, sitter’s left`), true),
-  ];
-}
-
-/** The middle of the longest stretch of an edge: no words stand across a notch. */
-function middleX({ outline, finishedMm }: CushionSpec, name: CushionEdge): number {
-  const spans = outlineStretches(outline).flatMap((one) =>
-    one.kind === 'line' && one.edge === name ? [[one.from[0], one.to[0]] as const] : [],
-  );
-  const [longest] = spans.sort((a, b) => Math.abs(b[1] - b[0]) - Math.abs(a[1] - a[0]));
-  return longest && spans.length > 1 ? (longest[0] + longest[1]) / 2 : finishedMm.widthMm / 2;
 }
 
 function planChains(spec: CushionSpec, labelMm: number): DrawShape[] {

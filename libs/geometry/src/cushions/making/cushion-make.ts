@@ -41,6 +41,16 @@ export const CONSTRUCTION_WORDS: Record<Construction, string> = {
   'plywood-backed': 'on plywood, pulled and stapled',
 };
 
+/** What the view from the front says of each make. */
+export const FRONT_EDGE_WORDS: Record<Construction, string> = {
+  boxed: 'boxing between seams, crown over it',
+  'tight-boxed': 'boxing lower than the foam, tight over it',
+  'knife-edge': 'knife edge: one seam at half the height',
+  waterfall: 'front in one piece with top and bottom',
+  bullnose: 'half-round front in one piece',
+  'plywood-backed': 'cover pulled round the board',
+};
+
 /** Closures in the words of the sheet. */
 export const CLOSURE_WORDS: Record<CushionMake['closure'], string> = {
   zip: 'zip',

@@ -1,0 +1,75 @@
+import type { CushionEdge } from '../cushions/cushion-choice.ts';
+import type { CushionSpec, EdgeMeets } from '../cushions/cushion-spec.ts';
+import { outlinePoints, outlineStretches } from '../outlines/outline.ts';
+import { WELT_MM } from './cushion-views.ts';
+import type { DrawShape, PagePoint } from './drawing.ts';
+
+/** What an edge meets, as the plan says it. */
+export const EDGE_WORDS: Record<EdgeMeets, string> = {
+  wall: 'wall',
+  'end-wall': 'end wall',
+  arm: 'arm',
+  neighbour: 'next cushion',
+  'corner-cushion': 'cushion of the other leg',
+  free: 'free end',
+  'back-pad': 'back edge, meets the back pad',
+  front: 'front edge',
+  'seat-cushion': 'lower edge, meets the seat cushion',
+  top: 'top edge',
+};
+
+/** Each edge with its name, what it meets, and whether it closes or is seen by the camera. */
+export function edgeWords(spec: CushionSpec, labelMm: number): DrawShape[] {
+  const { depthMm: d } = spec.finishedMm;
+  const inset = WELT_MM + labelMm / 3;
+  const words = (at: PagePoint, text: string, upright?: true): DrawShape => ({
+    kind: 'text',
+    at,
+    text,
+    anchor: 'middle',
+    ...(upright ? { upright } : {}),
+  });
+  const closed = spec.make.closure === 'zip' ? 'zip' : 'closure';
+  const isClosed = (edge: CushionEdge) =>
+    spec.make.closureEdge === edge && (spec.making?.closure.edgeMm ?? 0) > 0;
+  const named = (edge: CushionEdge, text: string): string =>
+    [text, isClosed(edge) ? closed : [], spec.cameraSides.includes(edge) ? 'camera side' : []]
+      .flat()
+      .join(', ');
+  const [low, high] = endsOf(spec);
+  return [
+    words([middleX(spec, 'back'), inset], named('back', EDGE_WORDS[spec.edges.back])),
+    words([middleX(spec, 'front'), d - inset], named('front', EDGE_WORDS[spec.edges.front])),
+    words([low + inset, d / 2], named('right', `${EDGE_WORDS[spec.edges.right]}, sitter’s right`), true),
+    words([high - inset, d / 2], named('left', `${EDGE_WORDS[spec.edges.left]}, sitter’s left`), true),
+  ];
+}
+
+/** The middle of the longest stretch of an edge: no words stand across a notch. */
+function middleX({ outline, finishedMm }: CushionSpec, name: CushionEdge): number {
+  const spans = outlineStretches(outline).flatMap((one) =>
+    one.kind === 'line' && one.edge === name ? [[one.from[0], one.to[0]] as const] : [],
+  );
+  const [longest] = spans.sort((a, b) => Math.abs(b[1] - b[0]) - Math.abs(a[1] - a[0]));
+  return longest ? (longest[0] + longest[1]) / 2 : finishedMm.widthMm / 2;
+}
+
+/** Part of the depth, about its middle, that words along an end take. */
+const END_WORDS = [0.35, 0.5, 0.65] as const;
+
+/** Where the ends of a cushion stand along the words that name them: further in where they slant. */
+function endsOf({ outline, finishedMm: { widthMm, depthMm } }: CushionSpec): [number, number] {
+  const points = outlinePoints(outline, 0.5);
+  const across = END_WORDS.map((share) => {
+    const y = share * depthMm;
+    return points.flatMap(([x1, y1], i) => {
+      const [x2, y2] = points[(i + 1) % points.length]!;
+      return y1 > y === y2 > y ? [] : [x1 + ((y - y1) / (y2 - y1)) * (x2 - x1)];
+    });
+  }).filter((met) => met.length > 1);
+  if (across.length === 0) return [0, widthMm];
+  return [
+    Math.max(...across.map((met) => Math.min(...met))),
+    Math.min(...across.map((met) => Math.max(...met))),
+  ];
+}
