@@ -101,9 +101,13 @@ export interface Order {
 }
 
 /** What an upholsterer asks for first and the order does not say, in words. */
-export function notSaidYet({ spec, neededBy }: Pick<Order, 'spec' | 'neededBy'>): string[] {
+export function notSaidYet({
+  spec,
+  covers,
+  neededBy,
+}: Pick<Order, 'spec' | 'covers' | 'neededBy'>): string[] {
   return [
-    spec.cover.trim() === '' && 'cover',
+    spec.cover.trim() === '' && covers.length === 0 && 'cover',
     spec.welt.trim() === '' && 'welt',
     neededBy === null && 'needed-by date',
   ].filter((words) => words !== false);

@@ -1,4 +1,4 @@
-import { chartNote, DIRECTION_WORDS, NAP_WORDS, type ClothOfOrder } from '@settlewright/geometry';
+import { chartNote, DIRECTION_WORDS, marksWords, NAP_WORDS, type ClothOfOrder } from '@settlewright/geometry';
 import { useQuery } from '@tanstack/react-query';
 import type { ReactNode } from 'react';
 import { useFormat } from '@/lib/format.ts';
@@ -72,7 +72,7 @@ export function ClothFacts({ cloth, assumed }: { cloth: ClothOfOrder; assumed: b
       {cover.startMm > 0 && <Fact words="Left out for flaws">{inches(cover.startMm)}</Fact>}
       <Fact words="Covers">
         {cover.parts ? `${cover.parts.join(' and ')} of ` : ''}
-        {marks.join(', ') || 'no cushion of this order'}
+        {marksWords(marks) || 'no cushion of this order'}
       </Fact>
       {cover.com && (
         <Fact words="Our own cloth">

@@ -1,3 +1,4 @@
+import { plainCover } from '@settlewright/geometry';
 import { screen, waitFor, within } from '@testing-library/react';
 import userEvent from '@testing-library/user-event';
 import { http, HttpResponse } from 'msw';
@@ -68,6 +69,33 @@ describe('OrderPage', () => {
     if (words === undefined) expect(dialog.queryByText(/^Not said yet/)).toBeNull();
     else expect(dialog.getByText(words)).toBeVisible();
     expect(dialog.getByLabelText('Message (optional)')).toBeVisible();
+  });
+
+  it('names before sending what cannot be made, and asks for no cover where cloths are said', async () => {
+    const user = userEvent.setup();
+    const [first, ...rest] = ORDER.cushions;
+    show({
+      ...ORDER,
+      spec: { ...ORDER.spec, cover: '' },
+      covers: [plainCover('plum moquette')],
+      cushions: [{ ...first!, faults: ['a waterfall front wraps a plain rectangle only'] }, ...rest],
+    });
+    await user.click(await screen.findByRole('button', { name: 'Send the order' }));
+    const dialog = within(await screen.findByRole('dialog', { name: 'Send the order' }));
+    expect(dialog.getByText('C1 cannot be made as asked')).toBeVisible();
+    expect(dialog.getByText(/^C1: a waterfall front wraps a plain rectangle only\./)).toBeVisible();
+    expect(dialog.getByText(/^Not said yet/)).not.toHaveTextContent('cover');
+  });
+
+  it('says of each cushion what the camera sees, what holds it and what its maker is told', async () => {
+    const [first, ...rest] = ORDER.cushions;
+    const told = { cameraSides: ['front' as const], holdDown: 'snaps' as const, notes: 'Pile to the front.' };
+    show({ ...ORDER, cushions: [{ ...first!, ...told }, ...rest] });
+    const cushion = within(await screen.findByRole('region', { name: 'Cushions C1' }));
+    const said = (name: string) => cushion.getByText(name, { selector: 'dt' }).nextElementSibling;
+    expect(said('Camera')).toHaveTextContent('sees the front');
+    expect(said('Hold-down')).toHaveTextContent('snaps, studs on the wood');
+    expect(said('Notes')).toHaveTextContent('Pile to the front.');
   });
 
   it.each([

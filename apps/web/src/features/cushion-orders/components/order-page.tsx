@@ -1,3 +1,4 @@
+import { marksWords } from '@settlewright/geometry';
 import { lazy, Suspense, useMemo, useState } from 'react';
 import { Button } from '@/components/button.tsx';
 import { PaleBars } from '@/components/loading.tsx';
@@ -52,7 +53,7 @@ function Opened({ path, order }: { path: OrderPath; order: Order }) {
     <div className="page">
       <PageHeading
         title={order.title}
-        below={`${marks.length} ${marks.length === 1 ? 'cushion' : 'cushions'}${marks.length > 0 ? `, ${marks.join(', ')}` : ''}. ${order.upholsterer?.name ?? 'No upholsterer yet'}.${order.neededBy ? ` Needed by ${dayWords(order.neededBy)}.` : ''}`}
+        below={`${marks.length} ${marks.length === 1 ? 'cushion' : 'cushions'}${marks.length > 0 ? `, ${marksWords(marks)}` : ''}. ${order.upholsterer?.name ?? 'No upholsterer yet'}.${order.neededBy ? ` Needed by ${dayWords(order.neededBy)}.` : ''}`}
         actions={
           <>
             <Button onClick={getPack}>Drawing pack, PDF</Button>

@@ -1,3 +1,4 @@
+import { marksWords } from '@settlewright/geometry';
 import { useState } from 'react';
 import { useForm } from 'react-hook-form';
 import { Combobox } from '@/components/combobox.tsx';
@@ -81,13 +82,14 @@ export function SendOrderDialog({ path, order, open, onClose }: DialogOfOrder) {
   const choices = (book.data?.items ?? []).map(({ id, name, email }) => ({ id, words: name, detail: email }));
   const marks = order.cushions.map(({ mark }) => mark);
   const notSaid = notSaidYet(order);
+  const unmade = order.cushions.filter(({ faults }) => faults.length > 0);
   return (
     <>
       <FormDialog
         open={open && adding === null}
         onClose={onClose}
         title="Send the order"
-        describe={`Revision ${order.revisionLetter}: ${marks.length} ${marks.length === 1 ? 'cushion' : 'cushions'} (${marks.join(', ')}). The drawing pack goes out as PDF with a private link to this order alone; nobody who sits is named in either.`}
+        describe={`Revision ${order.revisionLetter}: ${marks.length} ${marks.length === 1 ? 'cushion' : 'cushions'} (${marksWords(marks)}). The drawing pack goes out as PDF with a private link to this order alone; nobody who sits is named in either.`}
         verb="Send the order"
         busy={send.isPending}
         busyWords="Sending"
@@ -109,6 +111,15 @@ export function SendOrderDialog({ path, order, open, onClose }: DialogOfOrder) {
         }}
       >
         <div className="grid gap-4">
+          {unmade.length > 0 && (
+            <Notice
+              tone="wont"
+              title={`${marksWords(unmade.map(({ mark }) => mark))} cannot be made as asked`}
+            >
+              {unmade.map(({ mark, faults }) => `${mark}: ${faults.join('; ')}`).join('. ')}. Change it in the
+              room and issue a new revision, or send it so: the paper says that it is not as asked.
+            </Notice>
+          )}
           {notSaid.length > 0 && (
             <Notice>
               Not said yet: {notSaid.join(', ')}. The upholsterer’s first question will be about{' '}

@@ -1,3 +1,4 @@
+import { marksWords } from '@settlewright/geometry';
 import { useEffect, type ReactNode } from 'react';
 import { LoadingLine } from '@/components/loading.tsx';
 import { Notice } from '@/components/notice.tsx';
@@ -58,7 +59,7 @@ function Opened({ token, order }: { token: string; order: PublicOrder }) {
         <dl className="my-5 flex flex-wrap gap-x-10 gap-y-3">
           <Fact name="Needed by">{order.neededBy ? dayWords(order.neededBy) : 'to be agreed'}</Fact>
           <Fact name="Cushions">
-            {marks.length}: {marks.join(', ')}
+            {marks.length}: {marksWords(marks)}
           </Fact>
           <Fact name="For">
             {order.productionName}, {order.setName}
