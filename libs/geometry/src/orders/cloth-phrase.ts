@@ -1,6 +1,9 @@
 import { joined, phrase, type Phrase } from '../units/phrase.ts';
 import type { OrderCover } from './order-cover.ts';
+import { marksWords } from './marks-words.ts';
 import { DIRECTION_WORDS, NAP_WORDS } from './order-words.ts';
+
+const DAY = new Intl.DateTimeFormat('en-GB', { dateStyle: 'long', timeZone: 'UTC' });
 
 /**
  * All that is said of a cloth of an order to whoever sews with it. What the workshop pays for it is its own.
@@ -21,7 +24,7 @@ export function clothPhrase(cover: OrderCover): Phrase {
         : [],
       cover.startMm > 0 ? phrase`${{ mm: cover.startMm }} left out for flaws` : [],
       phrase`bought by ${{ mm: cover.stepMm }}`,
-      `for ${parts?.join(', ') ?? 'the whole cover'} of ${cushionMarks?.join(', ') ?? 'every cushion'}`,
+      `for ${parts ? `the ${parts.join(' and ')}` : 'the whole cover'} of ${cushionMarks ? marksWords(cushionMarks) : 'every cushion'}`,
       com ? ownPhrase(com) : [],
     ],
     ', ',
@@ -37,7 +40,7 @@ function ownPhrase(own: NonNullable<OrderCover['com']>): Phrase {
       dyeLot === '' ? [] : `dye lot ${dyeLot}`,
       measuredWidthMm === undefined ? [] : phrase`measured ${{ mm: measuredWidthMm }} wide`,
       receivedMm === undefined ? [] : phrase`${{ mm: receivedMm }} came`,
-      receivedOn === undefined ? [] : `on ${receivedOn}`,
+      receivedOn === undefined ? [] : `on ${DAY.format(new Date(receivedOn))}`,
       flaws === '' ? [] : `flaws: ${flaws}`,
     ],
     ', ',

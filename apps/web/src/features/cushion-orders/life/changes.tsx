@@ -57,6 +57,16 @@ function Side({ change, side }: { change: Change; side: 'before' | 'after' }): R
   );
 }
 
+/** A change too small for the units of the page would look like none. */
+function HairChange({ change }: { change: Change }): ReactNode {
+  const { style } = useFormat();
+  const { before, after } = change;
+  if (phraseText(before, style) !== phraseText(after, style)) return null;
+  const [from, to] = [before, after].map((parts) => (parts.length === 1 ? parts[0]?.mm : undefined));
+  if (from === undefined || to === undefined) return ', moved by less than is shown';
+  return `, ${Math.abs(to - from).toFixed(1)} mm ${to > from ? 'more' : 'less'}`;
+}
+
 /** What reads otherwise than in what was sent before, side by side. */
 export function Changes({ life, revisionLetter }: { life: OrderLife; revisionLetter: string }) {
   const { earlierRevision, changes } = life;
@@ -100,6 +110,7 @@ export function Changes({ life, revisionLetter }: { life: OrderLife; revisionLet
                   </td>
                   <td className="py-1.5 font-medium break-words">
                     <Side change={change} side="after" />
+                    <HairChange change={change} />
                   </td>
                 </tr>
               ))}

@@ -82,6 +82,7 @@ describe("the upholsterer's page", () => {
           after: [{ text: 'notch ' }, { mm: 50.8 }],
           outlines: { before: OUTLINE, after: OUTLINE },
         },
+        { mark: 'C2', field: 'depth', before: [{ mm: 762 }], after: [{ mm: 762.4 }] },
       ],
     });
     showPage();
@@ -92,6 +93,7 @@ describe("the upholsterer's page", () => {
     expect(rows[3]).toMatch(/^C1, outlineplain rectanglenotch 2″$/);
     expect(changed.getAllByRole('row')[3]!.querySelectorAll('svg')).toHaveLength(2);
     expect(rows[2]).toBe('Coverplum moquettenothing');
+    expect(rows[4]).toMatch(/, 0\.4 mm more$/);
   });
 
   it('lets the batch wait for the word on the first article', async () => {
