@@ -7,7 +7,7 @@ import { offsetFault, offsetOutline, outlinePoints, type OutlineCorner } from '.
 import { WELT_MM } from './cushion-views.ts';
 import { datumChain, dimensionChain } from './dimension-chain.ts';
 import { drawingOf, type Drawing, type DrawShape, type PagePoint } from './drawing.ts';
-import { EDGE_WORDS, edgeWords } from './plan-edges.ts';
+import { EDGE_WORDS, edgeWords, insetMm } from './plan-edges.ts';
 
 const BUTTON_RADIUS_MM = 11;
 
@@ -109,6 +109,7 @@ function closureShapes(spec: CushionSpec, labelMm: number): DrawShape[] {
                 at: [end[0] + inwards * 2 * tick, end[1]] as PagePoint,
                 text: word,
                 anchor: inwards > 0 ? ('start' as const) : ('end' as const),
+                short: { text: '', acrossMm: making.closure.wrapMm - insetMm(labelMm) },
               },
             ]
           : []),

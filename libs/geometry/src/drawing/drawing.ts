@@ -30,6 +30,8 @@ export type DrawShape =
       text: string;
       anchor: 'start' | 'middle' | 'end';
       upright?: true;
+      /** Said instead where the page has less room than this along the words, or across a line of them. */
+      short?: { text: string; alongMm?: number; acrossMm?: number };
     } & Owned)
   | DimensionShape;
 

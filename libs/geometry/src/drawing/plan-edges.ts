@@ -2,7 +2,7 @@ import type { CushionEdge } from '../cushions/cushion-choice.ts';
 import type { CushionSpec, EdgeMeets } from '../cushions/cushion-spec.ts';
 import { outlinePoints, outlineStretches } from '../outlines/outline.ts';
 import { WELT_MM } from './cushion-views.ts';
-import type { DrawShape, PagePoint } from './drawing.ts';
+import type { DrawShape } from './drawing.ts';
 
 /** What an edge meets, as the plan says it. */
 export const EDGE_WORDS: Record<EdgeMeets, string> = {
@@ -18,17 +18,13 @@ export const EDGE_WORDS: Record<EdgeMeets, string> = {
   top: 'top edge',
 };
 
+/** How far within its edge the middle of a line of words stands. */
+export const insetMm = (labelMm: number): number => WELT_MM + labelMm / 3;
+
 /** Each edge with its name, what it meets, and whether it closes or is seen by the camera. */
 export function edgeWords(spec: CushionSpec, labelMm: number): DrawShape[] {
   const { depthMm: d } = spec.finishedMm;
-  const inset = WELT_MM + labelMm / 3;
-  const words = (at: PagePoint, text: string, upright?: true): DrawShape => ({
-    kind: 'text',
-    at,
-    text,
-    anchor: 'middle',
-    ...(upright ? { upright } : {}),
-  });
+  const inset = insetMm(labelMm);
   const closed = spec.make.closure === 'zip' ? 'zip' : 'closure';
   const isClosed = (edge: CushionEdge) =>
     spec.make.closureEdge === edge && (spec.making?.closure.edgeMm ?? 0) > 0;
@@ -36,22 +32,45 @@ export function edgeWords(spec: CushionSpec, labelMm: number): DrawShape[] {
     [text, isClosed(edge) ? closed : [], spec.cameraSides.includes(edge) ? 'camera side' : []]
       .flat()
       .join(', ');
+  const level = (edge: 'back' | 'front', y: number): DrawShape => {
+    const { middleMm, lengthMm } = longestOf(spec, edge);
+    const text = named(edge, EDGE_WORDS[spec.edges[edge]]);
+    const short = { text: named(edge, PLAIN_WORDS[spec.kind][edge]), alongMm: lengthMm - 4 * inset };
+    return { kind: 'text', at: [middleMm, y], text, anchor: 'middle', short };
+  };
+  const upright = (edge: 'left' | 'right', x: number): DrawShape => ({
+    kind: 'text',
+    at: [x, d / 2],
+    text: named(edge, `${EDGE_WORDS[spec.edges[edge]]}, sitter’s ${edge}`),
+    anchor: 'middle',
+    upright: true,
+    short: { text: `sitter’s ${edge}`, alongMm: d },
+  });
   const [low, high] = endsOf(spec);
   return [
-    words([middleX(spec, 'back'), inset], named('back', EDGE_WORDS[spec.edges.back])),
-    words([middleX(spec, 'front'), d - inset], named('front', EDGE_WORDS[spec.edges.front])),
-    words([low + inset, d / 2], named('right', `${EDGE_WORDS[spec.edges.right]}, sitter’s right`), true),
-    words([high - inset, d / 2], named('left', `${EDGE_WORDS[spec.edges.left]}, sitter’s left`), true),
+    level('back', inset),
+    level('front', d - inset),
+    upright('right', low + inset),
+    upright('left', high - inset),
   ];
 }
 
-/** The middle of the longest stretch of an edge: no words stand across a notch. */
-function middleX({ outline, finishedMm }: CushionSpec, name: CushionEdge): number {
+const PLAIN_WORDS = {
+  seat: { back: 'back edge', front: 'front edge' },
+  back: { back: 'top edge', front: 'lower edge' },
+} as const;
+
+/** The longest stretch of an edge: no words stand across a notch. */
+function longestOf(
+  { outline, finishedMm }: CushionSpec,
+  name: CushionEdge,
+): { middleMm: number; lengthMm: number } {
   const spans = outlineStretches(outline).flatMap((one) =>
     one.kind === 'line' && one.edge === name ? [[one.from[0], one.to[0]] as const] : [],
   );
   const [longest] = spans.sort((a, b) => Math.abs(b[1] - b[0]) - Math.abs(a[1] - a[0]));
-  return longest ? (longest[0] + longest[1]) / 2 : finishedMm.widthMm / 2;
+  const [from, to] = longest ?? [0, finishedMm.widthMm];
+  return { middleMm: (from + to) / 2, lengthMm: Math.abs(to - from) };
 }
 
 /** Part of the depth, about its middle, that words along an end take. */

@@ -6,6 +6,7 @@ import { useWidth } from '@/lib/use-width.ts';
 import {
   dimensionLine,
   fitDrawing,
+  shownText,
   spreadWords,
   TEXT_PX,
   textWidthPx,
@@ -132,7 +133,7 @@ function Word({ shape, at, move }: WordProps) {
         fill="var(--color-ink)"
         transform={shape.upright ? `rotate(-90 ${middle} ${y})` : undefined}
       >
-        {shape.text}
+        {shownText(shape, at)}
       </text>
     </>
   );
@@ -183,7 +184,10 @@ export function CushionDrawing({ drawing, label, leastPx, mostPx = Infinity }: C
         ))}
         {drawing.shapes.map(
           (shape, index) =>
-            shape.kind === 'text' && <WordGround key={index} shape={shape} at={at} move={moves.get(shape)} />,
+            shape.kind === 'text' &&
+            shownText(shape, at) !== '' && (
+              <WordGround key={index} shape={shape} at={at} move={moves.get(shape)} />
+            ),
         )}
         {drawing.shapes.map((shape, index) => {
           if (shape.kind === 'text')

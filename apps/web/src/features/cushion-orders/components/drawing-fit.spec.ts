@@ -1,7 +1,7 @@
 import { cushionDrawing, formatLength, type DimensionShape } from '@settlewright/geometry';
 import { describe, expect, it } from 'vitest';
 import { CUSHIONS } from '../test/orders.ts';
-import { dimensionLine, fitDrawing, spreadWords, textWidthPx, wordBox } from './drawing-fit.ts';
+import { dimensionLine, fitDrawing, shownText, spreadWords, textWidthPx, wordBox } from './drawing-fit.ts';
 
 const inMm = ({ valueMm }: DimensionShape) => formatLength(valueMm, { system: 'millimetres', roundTo: 8 });
 
@@ -28,6 +28,19 @@ describe('a cushion drawn in millimetres', () => {
         expect(beside || bottom <= edge.top || top >= edge.bottom).toBe(true);
       }
     }
+  });
+
+  it('says less where a page is narrow', () => {
+    const [spec] = CUSHIONS;
+    const { plan } = cushionDrawing(spec!, { labelMm: 0.1 * spec!.finishedMm.widthMm });
+    const saidAt = (widthPx: number) => {
+      const { at } = fitDrawing(plan, widthPx, inMm);
+      return plan.shapes.flatMap((shape) => (shape.kind === 'text' ? [shownText(shape, at)] : []));
+    };
+    expect(saidAt(900)).toEqual(
+      expect.arrayContaining(['zip end', 'back edge, meets the back pad, zip', 'free end, sitter’s left']),
+    );
+    expect(saidAt(320)).toEqual(expect.arrayContaining(['', 'back edge, zip', 'sitter’s left']));
   });
 
   it('takes wide letters as wide: six of a number are no six of an average word', () => {

@@ -60,10 +60,18 @@ function boxAround([x, y]: Point, width: number, height: number): Box {
   return { left: x - width / 2, right: x + width / 2, top: y - height / 2, bottom: y + height / 2 };
 }
 
+/** The words of a shape, or what is said where they find no room. */
+export function shownText({ text, short }: TextShape, at: At): string {
+  if (!short) return text;
+  const scale = Math.abs(at.x(1) - at.x(0));
+  const { alongMm = Infinity, acrossMm = Infinity } = short;
+  return textWidthPx(text) > alongMm * scale || LINE_PX > acrossMm * scale ? short.text : text;
+}
+
 /** Where a word stands before it is moved. */
 export function wordBox(shape: TextShape, at: At): Box {
   const [x, y] = [at.x(shape.at[0]), at.y(shape.at[1])];
-  const width = textWidthPx(shape.text);
+  const width = textWidthPx(shownText(shape, at));
   if (shape.upright) return boxAround([x, y], LINE_PX, width);
   const middle = shape.anchor === 'middle' ? x : shape.anchor === 'start' ? x + width / 2 : x - width / 2;
   return boxAround([middle, y], width, LINE_PX);
