@@ -18,6 +18,7 @@ import { CushionGroups } from './cushion-groups.tsx';
 import { ChangeOrderDialog, RecordStateDialog } from './order-dialogs.tsx';
 import { OrderSide } from './order-side.tsx';
 import { SendOrderDialog } from './send-order-dialog.tsx';
+import { ToCorrespondence } from './to-correspondence.tsx';
 
 const ClothsSection = lazy(() => import('../cloths/cloths-section.tsx'));
 
@@ -93,6 +94,7 @@ function Opened({ path, order }: { path: OrderPath; order: Order }) {
               Record as {orderStateWords(state).toLowerCase()}
             </button>
           ))}
+        {order.cushions.length > 0 && <ToCorrespondence words="To quote, questions and files" />}
         {canEdit && order.nextStates.includes('cancelled') && (
           <button type="button" className="link min-h-8" onClick={() => setDialog('cancelled')}>
             Cancel the order

@@ -11,6 +11,7 @@ import { EVENT_WORDS, type Order } from '../order.ts';
 import { ShopLife } from '../life/shop-life.tsx';
 import { ShopPapers } from './order-papers.tsx';
 import { Thread } from './thread.tsx';
+import { CORRESPONDENCE_ID } from './to-correspondence.tsx';
 import { WriteBox } from './write-box.tsx';
 
 function linkWords({ state, expiresAt }: Order['link']): string {
@@ -107,7 +108,7 @@ export function OrderSide({ path, order }: { path: OrderPath; order: Order }) {
   const sent = order.sent !== null;
   const who = order.upholsterer?.contactName || order.upholsterer?.name || 'the upholsterer';
   return (
-    <aside aria-label="With the upholsterer" className="min-w-0">
+    <aside id={CORRESPONDENCE_ID} aria-label="With the upholsterer" className="min-w-0 scroll-mt-16">
       {order.cushions.length > 0 && <ShopPapers path={path} />}
       <RuleHeading>{order.upholsterer ? `With ${order.upholsterer.name}` : 'Not sent yet'}</RuleHeading>
       {order.acknowledgement && (

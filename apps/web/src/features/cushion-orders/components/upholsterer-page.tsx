@@ -24,6 +24,7 @@ import { ClothWords } from './cloth-words.tsx';
 import { CushionGroups } from './cushion-groups.tsx';
 import { LinkPapers } from './order-papers.tsx';
 import { Thread } from './thread.tsx';
+import { CORRESPONDENCE_ID, ToCorrespondence } from './to-correspondence.tsx';
 import { WriteBox } from './write-box.tsx';
 
 function Fact({ name, children }: { name: string; children: ReactNode }) {
@@ -65,6 +66,9 @@ function Opened({ token, order }: { token: string; order: PublicOrder }) {
             {order.productionName}, {order.setName}
           </Fact>
         </dl>
+        <p className="mb-3">
+          <ToCorrespondence words="To papers, questions and price" />
+        </p>
         {life.data && <Changes life={life.data} revisionLetter={order.revisionLetter} />}
         <CushionGroups cushions={order.cushions} words={order.spec} toleranceMm={life.data?.toleranceMm} />
         <ClothWords covers={order.covers} />
@@ -75,7 +79,7 @@ function Opened({ token, order }: { token: string; order: PublicOrder }) {
           </p>
         )}
       </div>
-      <aside className="min-w-0">
+      <aside id={CORRESPONDENCE_ID} className="min-w-0 scroll-mt-4">
         <LinkPapers token={token} order={order} />
         <RuleHeading>So far</RuleHeading>
         <Thread messages={order.messages} own="upholsterer" />
