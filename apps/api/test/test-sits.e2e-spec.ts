@@ -46,6 +46,25 @@ describe('test sits', () => {
     expect(await list()).toEqual([body]);
   });
 
+  it('of layers in a wrap are kept with them, and estimated as springs one on another', async () => {
+    const layers = [
+      { share: 0.5, times: 0.5 },
+      { share: 0.5, times: 2 },
+    ];
+    const wrap = { thicknessMm: 25.4, lostMm: 12.7 };
+    const { body } = await add({ castId, layers }).expect(201);
+    expect(body).toMatchObject({ layers });
+    // p 0.844 psi of 170 lb on layers of 18 and 72 lb: 0.25 + 0.4 · (0.844 − 0.36)/0.36 is beyond 0.65; 0.25 · 0.844/1.44.
+    expect(body.predictedMm / 25.4).toBeCloseTo(2 * 0.65 + 2 * 0.1465, 2);
+    const wrapped = (await add({ castId, layers, wrap }).expect(201)).body;
+    expect(wrapped).toMatchObject({ layers, wrap });
+    expect(await list()).toEqual(expect.arrayContaining([body, wrapped]));
+    await add({ castId, layers: layers.slice(1) }).expect(400);
+    await add({ castId, layers: [{ share: 0.5, times: 0 }, layers[1]] }).expect(400);
+    await add({ castId, wrap: { thicknessMm: 25.4 } }).expect(400);
+    await add({ castId, wrap: [] }).expect(400);
+  });
+
   it('of somebody of no cast need a weight; a typed weight stands over that of the cast', async () => {
     const { body } = await add({ name: 'The painter' }).expect(400);
     expect(body.fields).toEqual([expect.objectContaining({ path: 'weightKg', code: 'not-known' })]);

@@ -34,7 +34,13 @@ export * from './pieces/parameters.ts';
 export { LEAF_WORDS, leavesOfTable, withLeaf, type LeafEdge, type TableLeaf } from './pieces/table-leaves.ts';
 export * from './pieces/place-frames.ts';
 export * from './pieces/bench-layout.ts';
-export { foamSituation, testedOf } from './pieces/foam-situation.ts';
+export {
+  foamBuild,
+  foamSituation,
+  testedOf,
+  untestedSituation,
+  type FoamBuild,
+} from './pieces/foam-situation.ts';
 export { pressedSeatHeightMm, referenceSinkMm } from './pieces/seat-sink.ts';
 export * from './situation/measure-set.ts';
 export * from './situation/suggest-fixes.ts';

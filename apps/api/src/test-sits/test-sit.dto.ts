@@ -1,8 +1,22 @@
 import { ApiProperty, ApiPropertyOptional } from '@nestjs/swagger';
-import { IsNumber, IsOptional, IsUUID, Max, Min, ValidateBy } from 'class-validator';
+import { Type } from 'class-transformer';
+import {
+  ArrayMaxSize,
+  ArrayMinSize,
+  IsArray,
+  IsNumber,
+  IsObject,
+  IsOptional,
+  IsUUID,
+  Max,
+  Min,
+  ValidateBy,
+  ValidateNested,
+} from 'class-validator';
 import { DAY_WORDS, isPastDay } from '../cast/day';
 import { WithinLimit } from '../cast/limit.decorator';
 import { NAME_MAX, WEIGHT_LIMIT } from '../cast/limits';
+import { CushionFoamLayerDto, CushionWrapDto } from '../common/foam-build.dto';
 import { TextField } from '../common/text-field';
 import type { TestSitRow } from './test-sit.entity';
 
@@ -54,6 +68,27 @@ export class AddTestSitDto {
   thicknessMm: number;
 
   @ApiPropertyOptional({
+    type: [CushionFoamLayerDto],
+    minItems: 2,
+    maxItems: 4,
+    description: 'from the top down, where it is laminated',
+  })
+  @IsOptional()
+  @IsArray()
+  @ArrayMinSize(2)
+  @ArrayMaxSize(4)
+  @ValidateNested({ each: true })
+  @Type(() => CushionFoamLayerDto)
+  layers?: CushionFoamLayerDto[];
+
+  @ApiPropertyOptional({ type: CushionWrapDto })
+  @IsOptional()
+  @IsObject()
+  @ValidateNested()
+  @Type(() => CushionWrapDto)
+  wrap?: CushionWrapDto;
+
+  @ApiPropertyOptional({
     minimum: WEIGHT_LIMIT.min,
     maximum: WEIGHT_LIMIT.max,
     description: 'as in the cast, where it is not said',
@@ -91,6 +126,10 @@ export class TestSitDto {
   supportFactor: number;
   @ApiProperty()
   thicknessMm: number;
+  @ApiPropertyOptional({ type: [CushionFoamLayerDto] })
+  layers?: CushionFoamLayerDto[];
+  @ApiPropertyOptional({ type: CushionWrapDto })
+  wrap?: CushionWrapDto;
   @ApiProperty()
   weightKg: number;
   @ApiProperty({ description: 'by the estimate alone, whatever other sits say' })
@@ -102,7 +141,7 @@ export class TestSitDto {
 
   static of(row: TestSitRow): TestSitDto {
     const { id, castId, satOn, grade, ifd25N, supportFactor, thicknessMm } = row;
-    const { weightKg, predictedMm, measuredMm, note } = row;
+    const { layers, wrap, weightKg, predictedMm, measuredMm, note } = row;
     return {
       id,
       ...(castId === null ? {} : { castId }),
@@ -112,6 +151,8 @@ export class TestSitDto {
       ifd25N,
       supportFactor,
       thicknessMm,
+      ...(layers && { layers }),
+      ...(wrap && { wrap }),
       weightKg,
       predictedMm,
       measuredMm,

@@ -1,3 +1,4 @@
+import type { FoamBuild } from '@settlewright/geometry';
 import {
   Column,
   CreateDateColumn,
@@ -52,6 +53,14 @@ export class TestSitRow {
 
   @Column('double precision')
   thicknessMm: number;
+
+  /** As in the set document; null where the foam is in one piece. */
+  @Column('jsonb', { nullable: true })
+  layers: FoamBuild['layers'] | null;
+
+  /** Null where there is none. */
+  @Column('jsonb', { nullable: true })
+  wrap: FoamBuild['wrap'] | null;
 
   @Column('double precision')
   weightKg: number;

@@ -1,4 +1,5 @@
 import { seatSinkMm } from '@settlewright/anthropometry';
+import { type FoamBuild, untestedSituation } from '@settlewright/geometry';
 import { Injectable } from '@nestjs/common';
 import { InjectRepository } from '@nestjs/typeorm';
 import type { Repository } from 'typeorm';
@@ -45,7 +46,9 @@ export class TestSitsService {
     dto: AddTestSitDto,
   ): Promise<TestSitRow> {
     await this.access.forChanging(member, productionId, setId);
-    const { castId = null, name = null, satOn, grade, ifd25N, supportFactor, thicknessMm } = dto;
+    const { castId = null, name = null, satOn, grade, measuredMm, note = '' } = dto;
+    const { ifd25N, supportFactor, thicknessMm, layers, wrap } = dto;
+    const build: FoamBuild = { ifd25N, supportFactor, thicknessMm, layers, wrap };
     if ((castId === null) === (name === null)) {
       throw invalid('name', 'who-sat', 'either somebody of the cast or a name says who sat');
     }
@@ -55,13 +58,12 @@ export class TestSitsService {
         castId === null ? null : await this.cast.lockedMember(manager, member, productionId, castId);
       const weightKg = dto.weightKg ?? person?.weightKg ?? null;
       if (weightKg === null) throw invalid('weightKg', 'not-known', 'the weight is not in the cast: say it');
-      const { sinkMm } = seatSinkMm({ thicknessMm, ifd25N, supportFactor }, weightKg);
+      const foam = untestedSituation(build);
+      if (!foam) throw new RangeError('A hard seat has no drop.');
       const { id } = await manager.save(
         manager.create(TestSitRow, {
-          ...{ setId, castId, name, satOn, grade, ifd25N, supportFactor, thicknessMm, weightKg },
-          predictedMm: sinkMm,
-          measuredMm: dto.measuredMm,
-          note: dto.note ?? '',
+          ...{ setId, castId, name, satOn, grade, ...build, weightKg, measuredMm, note },
+          predictedMm: seatSinkMm(foam, weightKg).sinkMm,
           createdById: member.userId,
         }),
       );

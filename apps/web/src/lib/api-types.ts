@@ -2965,6 +2965,18 @@ export interface components {
             detail: string;
             fields?: components["schemas"]["ProblemField"][];
         };
+        CushionFoamLayerDto: {
+            /** @description of the foam */
+            share: number;
+            /** @description firmness over that of the whole */
+            times: number;
+        };
+        CushionWrapDto: {
+            /** @description both faces together */
+            thicknessMm: number;
+            /** @description lost under a sitter */
+            lostMm: number;
+        };
         TestSitDto: {
             /** Format: uuid */
             id: string;
@@ -2978,6 +2990,8 @@ export interface components {
             ifd25N: number;
             supportFactor: number;
             thicknessMm: number;
+            layers?: components["schemas"]["CushionFoamLayerDto"][];
+            wrap?: components["schemas"]["CushionWrapDto"];
             weightKg: number;
             /** @description by the estimate alone, whatever other sits say */
             predictedMm: number;
@@ -3005,6 +3019,9 @@ export interface components {
             ifd25N: number;
             supportFactor: number;
             thicknessMm: number;
+            /** @description from the top down, where it is laminated */
+            layers?: components["schemas"]["CushionFoamLayerDto"][];
+            wrap?: components["schemas"]["CushionWrapDto"];
             /** @description as in the cast, where it is not said */
             weightKg?: number;
             /** @description how far the seat went down */
@@ -4281,22 +4298,12 @@ export interface components {
             /** @enum {string} */
             edge?: "back" | "front" | "left" | "right";
         };
-        CushionFoamLayerDto: {
-            /** @description of the foam */
-            share: number;
-            /** @description firmness over that of the whole */
-            times: number;
-        };
-        CushionWrapDto: {
-            /** @description both faces together */
-            thicknessMm: number;
-            /** @description lost under a sitter */
-            lostMm: number;
-        };
         TestedCushionDto: {
             thicknessMm: number;
             ifd25N: number;
             supportFactor: number;
+            layers?: components["schemas"]["CushionFoamLayerDto"][];
+            wrap?: components["schemas"]["CushionWrapDto"];
         };
         TestedFoamDto: {
             /** @description by what the estimate of the drop is multiplied */

@@ -1,4 +1,4 @@
-import { SINK_ERROR } from '@settlewright/anthropometry';
+import { seatSinkMm, SINK_ERROR } from '@settlewright/anthropometry';
 import { describe, expect, it } from 'vitest';
 import { foamSituation } from '../pieces/foam-situation.ts';
 import { referenceSinkMm } from '../pieces/seat-sink.ts';
@@ -74,13 +74,64 @@ describe('what test sits say of a cushion', () => {
     expect(JSON.stringify(testedBySits(CUSHION, sits(1.3)))).not.toMatch(/weight|measured/i);
   });
 
-  it('says nothing of a foam in layers or with a wrap', () => {
-    const wrapped = { ...CUSHION, foam: { ...FOAM, wrap: { thicknessMm: 25, lostMm: 12.5 } } };
-    expect(testedBySits(wrapped, sits(1.3))).toBeUndefined();
-    const tested = testedBySits(CUSHION, sits(1.3));
-    expect(foamSituation({ ...wrapped, foam: withTested(wrapped.foam, tested) })).not.toHaveProperty(
-      'tested',
-    );
+  describe('in layers or with a wrap', () => {
+    const layers = [
+      { share: 0.25, times: 0.7 },
+      { share: 0.75, times: 1.4 },
+    ];
+    const wrap = { thicknessMm: 12.7, lostMm: 6.35 };
+    const laminated = { ...CUSHION, foam: { ...FOAM, layers, wrap } };
+    const plain = foamSituation(laminated)!;
+    /** Everybody went down 1.2 times as far as the layers and the wrap together say. */
+    const own = sits(1).map((sit) => {
+      const { sinkMm } = seatSinkMm(plain, sit.weightKg);
+      return { ...sit, layers, wrap, measuredMm: 1.2 * sinkMm };
+    });
+    const tested = testedBySits(laminated, own)!;
+
+    it('scales the drop of the whole', () => {
+      expect(tested).toMatchObject({ sits: 4, of: { thicknessMm: 101.6, layers, wrap } });
+      expect(tested.factor).toBeGreaterThan(1.15);
+      expect(tested.factor).toBeLessThan(1.2);
+      const situation = foamSituation({ ...laminated, foam: withTested(laminated.foam, tested) })!;
+      expect(situation.tested).toMatchObject({ sits: 4 });
+      expect(seatSinkMm(situation, 60).sinkMm).toBeCloseTo(tested.factor * seatSinkMm(plain, 60).sinkMm, 9);
+      const document = withCushion(withTested(laminated.foam, tested));
+      const read = readSetDocument(JSON.parse(JSON.stringify(document)));
+      expect(read.ok && read.value).toEqual(document);
+    });
+
+    it.each<[string, Foam]>([
+      ['without the wrap', { ...FOAM, layers }],
+      ['in a thicker wrap', { ...FOAM, layers, wrap: { thicknessMm: 25.4, lostMm: 12.7 } }],
+      ['in one piece', { ...FOAM, wrap }],
+      ['with the layers the other way up', { ...FOAM, wrap, layers: layers.toReversed() }],
+      [
+        'with a thicker top',
+        {
+          ...FOAM,
+          wrap,
+          layers: [
+            { share: 0.5, times: 0.7 },
+            { share: 0.5, times: 1.4 },
+          ],
+        },
+      ],
+    ])('says nothing of another build-up: %s', (_, foam) => {
+      expect(testedBySits({ ...CUSHION, foam }, own)).toBeUndefined();
+      expect(foamSituation({ ...CUSHION, foam: withTested(foam, tested) })).not.toHaveProperty('tested');
+    });
+
+    it('is of no use to a plain foam, nor a plain foam’s sit to it', () => {
+      expect(testedBySits(CUSHION, own)).toBeUndefined();
+      expect(testedBySits(laminated, sits(1.3))).toBeUndefined();
+    });
+
+    it('is found anew where the wrap is held to lose another part', () => {
+      const other = { ...FOAM, layers, wrap: { ...wrap, lostMm: 3 } };
+      expect(foamSituation({ ...CUSHION, foam: withTested(other, tested) })).not.toHaveProperty('tested');
+      expect(testedBySits({ ...CUSHION, foam: other }, own)!.factor).toBeGreaterThan(tested.factor);
+    });
   });
 
   it('moves the seat, and is read back with the set', () => {

@@ -1,41 +1,33 @@
 import { calibrateSink } from '@settlewright/anthropometry';
-import type { FoamCushion } from '../pieces/foam-situation.ts';
+import {
+  foamBuild,
+  isBuiltAlike,
+  untestedSituation,
+  type FoamBuild,
+  type FoamCushion,
+} from '../pieces/foam-situation.ts';
 import type { Foam } from '../room/document.ts';
 
 /** A test sit as far as a foam is judged by it. */
-export interface KeptSit {
+export interface KeptSit extends FoamBuild {
   /** Calendar day, `2026-11-03`. */
   satOn: string;
   grade: string;
-  thicknessMm: number;
-  ifd25N: number;
-  supportFactor: number;
   weightKg: number;
   measuredMm: number;
 }
 
-const SAME = 1e-6;
-
 /**
- * Sits on just such a cushion: grade, firmness and thickness. A sit is kept for a plain foam, without layers or wrap.
+ * Sits on just such a cushion: grade, thickness, firmness, layers and wrap.
  *
  * @param cushion - thickness in millimetres and foam
  * @param sits - any; millimetres, newtons, kilograms
  * @returns those that say something of it
  */
-export const sitsOn = <Sit extends KeptSit>(
-  { thicknessMm, foam }: FoamCushion,
-  sits: readonly Sit[],
-): Sit[] =>
-  sits.filter(
-    (sit) =>
-      !foam.layers &&
-      !foam.wrap &&
-      sit.grade === foam.grade &&
-      Math.abs(sit.thicknessMm - thicknessMm) < SAME &&
-      Math.abs(sit.ifd25N - foam.ifd25N) < SAME &&
-      Math.abs(sit.supportFactor - foam.supportFactor) < SAME,
-  );
+export function sitsOn<Sit extends KeptSit>(cushion: FoamCushion, sits: readonly Sit[]): Sit[] {
+  const build = foamBuild(cushion);
+  return sits.filter((sit) => sit.grade === cushion.foam.grade && isBuiltAlike(sit, build));
+}
 
 /**
  * What test sits say of a cushion, without anybody's weight.
@@ -52,9 +44,10 @@ export function testedBySits(cushion: FoamCushion, sits: readonly KeptSit[]): Fo
     .sort()
     .at(-1);
   if (on === undefined) return undefined;
-  const { thicknessMm, foam } = cushion;
-  const of = { thicknessMm, ifd25N: foam.ifd25N, supportFactor: foam.supportFactor };
-  const found = calibrateSink(own.map(({ weightKg, measuredMm }) => ({ foam: of, weightKg, measuredMm })));
+  const of = foamBuild(cushion);
+  const foam = untestedSituation(of);
+  if (!foam) return undefined;
+  const found = calibrateSink(own.map(({ weightKg, measuredMm }) => ({ foam, weightKg, measuredMm })));
   return { ...found, on, of };
 }
 

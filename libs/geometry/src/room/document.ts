@@ -16,10 +16,8 @@ export const MAX_PIECES = 300;
 const length = (min: number, max: number) => z.number().min(min).max(max);
 const text = (max: number) => z.string().trim().max(max);
 
-const foam = z.strictObject({
-  /** Shop name of the grade, for example "firm seat". */
-  grade: text(60),
-  densityKgM3: length(10, 200),
+/** What a foam goes down by: firmness, layers and wrap. */
+const foamBuild = {
   /** 25 % indentation force deflection in newtons (ASTM D3574). */
   ifd25N: length(20, 600),
   supportFactor: length(1.2, 4),
@@ -31,6 +29,13 @@ const foam = z.strictObject({
     .optional(),
   /** Polyester round it, inside the cushion's thickness, and how much of that is lost under a sitter. */
   wrap: z.strictObject({ thicknessMm: length(1, 60), lostMm: length(0, 60) }).optional(),
+};
+
+const foam = z.strictObject({
+  /** Shop name of the grade, for example "firm seat". */
+  grade: text(60),
+  densityKgM3: length(10, 200),
+  ...foamBuild,
   /** What test sits say of it. Whoever sat, and how heavy they are, is not in the document. */
   tested: z
     .strictObject({
@@ -41,12 +46,8 @@ const foam = z.strictObject({
       sits: z.number().int().min(1).max(1000),
       /** Day of the last sit. */
       on: z.iso.date(),
-      /** The cushion that was sat on: another firmness or thickness is not tested by it. */
-      of: z.strictObject({
-        thicknessMm: length(1, 250),
-        ifd25N: length(20, 600),
-        supportFactor: length(1.2, 4),
-      }),
+      /** The cushion that was sat on: another thickness, firmness or build-up is not tested by it. */
+      of: z.strictObject({ thicknessMm: length(1, 250), ...foamBuild }),
     })
     .optional(),
 });

@@ -1,21 +1,8 @@
 import type { CushionSpec } from '@settlewright/geometry';
 import { ApiProperty, ApiPropertyOptional } from '@nestjs/swagger';
+import { CushionFoamLayerDto, CushionWrapDto } from '../../common/foam-build.dto';
 
 type Foam = CushionSpec['foam'];
-
-class CushionFoamLayerDto {
-  @ApiProperty({ description: 'of the foam' })
-  share: number;
-  @ApiProperty({ description: 'firmness over that of the whole' })
-  times: number;
-}
-
-class CushionWrapDto {
-  @ApiProperty({ description: 'both faces together' })
-  thicknessMm: number;
-  @ApiProperty({ description: 'lost under a sitter' })
-  lostMm: number;
-}
 
 class TestedCushionDto {
   @ApiProperty()
@@ -24,6 +11,10 @@ class TestedCushionDto {
   ifd25N: number;
   @ApiProperty()
   supportFactor: number;
+  @ApiPropertyOptional({ type: [CushionFoamLayerDto] })
+  layers?: CushionFoamLayerDto[];
+  @ApiPropertyOptional({ type: CushionWrapDto })
+  wrap?: CushionWrapDto;
 }
 
 class TestedFoamDto {

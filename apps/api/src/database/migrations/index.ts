@@ -13,6 +13,7 @@ import { CushionSettings1796202960000 } from './1796202960000-cushion-settings';
 import { ClothsOfAnOrder1796206800000 } from './1796206800000-cloths-of-an-order';
 import { Arrangements1796238000000 } from './1796238000000-arrangements';
 import { TestSits1796240400000 } from './1796240400000-test-sits';
+import { BuildOfATestedFoam1796254800000 } from './1796254800000-build-of-a-tested-foam';
 
 /** In the order in which they run. What is merged is never changed. */
 export const MIGRATIONS: (new () => MigrationInterface)[] = [
@@ -30,4 +31,5 @@ export const MIGRATIONS: (new () => MigrationInterface)[] = [
   ClothsOfAnOrder1796206800000,
   Arrangements1796238000000,
   TestSits1796240400000,
+  BuildOfATestedFoam1796254800000,
 ];

@@ -1,3 +1,4 @@
+import { foamBuild } from '@settlewright/geometry';
 import { useState } from 'react';
 import { Button } from '@/components/button.tsx';
 import { LengthField } from '@/components/length-field.tsx';
@@ -45,13 +46,11 @@ export function TestSitForm({ piece: { seatCushion } }: { piece: CushionedPiece 
   const send = () => {
     setTried(true);
     if (Object.values(missing).some(Boolean) || add.isPending || drop.value === null) return;
-    const { thicknessMm, foam } = seatCushion;
     const sit: NewTestSit = {
       ...(castId === SOMEBODY ? { name: name.trim() } : { castId }),
       ...(weight.value === null ? {} : { weightKg: weight.value }),
       ...(note.trim() === '' ? {} : { note: note.trim() }),
-      ...{ satOn, grade: foam.grade, ifd25N: foam.ifd25N, supportFactor: foam.supportFactor },
-      ...{ thicknessMm, measuredMm: drop.value },
+      ...{ satOn, grade: seatCushion.foam.grade, ...foamBuild(seatCushion), measuredMm: drop.value },
     };
     add.mutate(sit, {
       onSuccess: () => {

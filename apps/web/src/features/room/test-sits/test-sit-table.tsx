@@ -4,6 +4,7 @@ import type { TestSit } from '@/lib/contract.ts';
 import { dayWords } from '@/lib/dates.ts';
 import { useFormat } from '@/lib/format.ts';
 import { useSurroundings } from '../room-context.tsx';
+import { builtWords } from './tested-words.ts';
 import { useRemoveTestSit } from './test-sits-api.ts';
 
 const HEADS = ['Who', 'Day', 'Foam', 'Weight', 'Estimated', 'Measured'];
@@ -51,7 +52,7 @@ export function TestSitTable({
                 </th>
                 <td className="py-1 pr-3">{dayWords(sit.satOn)}</td>
                 <td className="py-1 pr-3">
-                  {sit.grade}, {length(sit.thicknessMm)}
+                  {sit.grade}, {builtWords(sit, length)}
                   {!own.includes(sit) && <span className="block text-xs text-ink-2">not this cushion</span>}
                 </td>
                 <td className="py-1 pr-3 tabular-nums">{mass(sit.weightKg)}</td>

@@ -1,4 +1,4 @@
-import { sitsOn, testedBySits, testedOf, withTested, type Foam } from '@settlewright/geometry';
+import { foamBuild, sitsOn, testedBySits, testedOf, withTested, type Foam } from '@settlewright/geometry';
 import { Button } from '@/components/button.tsx';
 import { LoadingLine } from '@/components/loading.tsx';
 import { Notice } from '@/components/notice.tsx';
@@ -9,7 +9,7 @@ import { useSurroundings } from '../room-context.tsx';
 import { TestSitForm } from './test-sit-form.tsx';
 import { TestSitTable } from './test-sit-table.tsx';
 import { useTestSits } from './test-sits-api.ts';
-import { takenWords, testedWords } from './tested-words.ts';
+import { builtWords, takenWords, testedWords } from './tested-words.ts';
 
 /** What the set counts with now. */
 function InTheSet({ tested }: { tested: Foam['tested'] }) {
@@ -17,7 +17,7 @@ function InTheSet({ tested }: { tested: Foam['tested'] }) {
     <p className="text-sm">
       {tested
         ? `The set counts with it: ${testedWords(tested)}.`
-        : 'The set counts with the estimate: nobody’s sit on this foam and thickness is taken into it.'}
+        : 'The set counts with the estimate: nobody’s sit on such a cushion is taken into it.'}
     </p>
   );
 }
@@ -43,7 +43,6 @@ function KeptSits({ making, tested }: { making: Making; tested: Foam['tested'] }
   if (sits.isPending) return <LoadingLine words="Fetching the test sits" />;
   if (sits.isError)
     return <Notice tone="wont">The test sits could not be fetched: {sits.error.message}</Notice>;
-  const isPlain = !seatCushion.foam.layers && !seatCushion.foam.wrap;
   const found = testedBySits(seatCushion, sits.data);
   const differs = JSON.stringify(found) !== JSON.stringify(tested);
   const take = (next: Foam['tested']) =>
@@ -69,16 +68,11 @@ function KeptSits({ making, tested }: { making: Making; tested: Foam['tested'] }
         </p>
       )}
       <TestSitTable sits={sits.data} own={sitsOn(seatCushion, sits.data)} canEdit={canEdit} />
-      {canEdit && !isPlain && (
-        <p className="text-sm text-ink-2">
-          A sit is kept for a plain foam; {seatCushion.foam.grade} has layers or a wrap.
-        </p>
-      )}
-      {canEdit && isPlain && (
+      {canEdit && (
         <>
           <p className="text-sm text-ink-2">
-            A sit on {seatCushion.foam.grade}, {length(seatCushion.thicknessMm)} thick, as {piece.mark} has
-            now:
+            A sit on {seatCushion.foam.grade}, {builtWords(foamBuild(seatCushion), length)}, as {piece.mark}{' '}
+            has now:
           </p>
           <TestSitForm piece={piece} />
         </>
