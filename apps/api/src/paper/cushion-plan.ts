@@ -166,14 +166,17 @@ function nameEdges(figure: Figure): void {
     }
   }
   if (!along) return;
-  for (const [words, x] of [
-    [plan.edges.left, along[0] + 4],
-    [plan.edges.right, along[1] - 1.8],
+  // The sitter's left is at the right of the page.
+  for (const [whole, hand, x] of [
+    [plan.edges.left, 'sitter’s right', along[0] + 4],
+    [plan.edges.right, 'sitter’s left', along[1] - 1.8],
   ] as const) {
     const room = crossings(figure, 'x', x - 1.2);
     if (!room) continue;
-    const places = middles(room, sheet.textWidth(words), [0, 3, -3, 6, -6]).map((y) => ({ x, y }));
-    taken.write(sheet, words, places, { angleDeg: 90, align: 'center' });
+    for (const words of [whole, hand]) {
+      const places = middles(room, sheet.textWidth(words), [0, 3, -3, 6, -6]).map((y) => ({ x, y }));
+      if (taken.write(sheet, words, places, { angleDeg: 90, align: 'center' })) break;
+    }
   }
 }
 

@@ -38,7 +38,7 @@ export function drawCushionFront(
     );
   }
   if (sheet.textWidth(cushion.words) < width - 4 && height > 4) {
-    sheet.text(cushion.words, x + width / 2, y + height / 2 + 1.15, { align: 'center' });
+    sheet.flag(cushion.words, x + width / 2, y + height / 2 + 1.15, { align: 'center' });
   } else sheet.text(cushion.words, x, y + height + 4.2);
   drawChain(sheet, {
     stops: [y, y + height],

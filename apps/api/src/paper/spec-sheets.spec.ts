@@ -7,6 +7,8 @@ import { type Chain, chainDepth, drawChain } from './dimension-chain';
 import { breakLines } from './paragraph';
 import { spaces } from './cushion-chains';
 import { Sheet, type TextStyle } from './sheet';
+import { runWords } from './spec-words';
+import { TakenSpace } from './taken-space';
 
 interface Label {
   text: string;
@@ -36,6 +38,22 @@ const newSheet = () => new RememberingSheet(doc, 297, 210);
 
 const overlap = (a: Label, b: Label) =>
   a.left < b.right && b.left < a.right && a.top < b.bottom && b.top < a.bottom;
+
+describe('words on a sheet', () => {
+  it('say a long run in the next larger unit as well', () => {
+    expect(runWords(6249.4, { system: 'millimetres', roundTo: 16 })).toBe('6249\u202fmm (6.25\u00a0m)');
+    expect(runWords(6096, { system: 'feet-inches', roundTo: 16 })).toBe('240″ (20′\u00a00″)');
+  });
+
+  it('go to the next place where one is taken', () => {
+    const sheet = newSheet();
+    const taken = new TakenSpace();
+    taken.take({ x: 94, y: 44, width: 12, height: 12 });
+    const places = [0, 22].map((off) => ({ x: 100 + off, y: 51 }));
+    expect(taken.write(sheet, 'joins B1', places, { align: 'center' })).toBe(true);
+    expect(sheet.labels.map(({ left, right }) => (left + right) / 2)).toEqual([122]);
+  });
+});
 
 describe('a chain of dimensions', () => {
   const lengths = fc.array(fc.integer({ min: 1, max: 40 }), { minLength: 1, maxLength: 25 });

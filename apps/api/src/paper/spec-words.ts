@@ -28,8 +28,9 @@ export function otherSystemWords(size: Size, units: LengthStyle): string {
   );
 }
 
-/** Long lengths of welt and boxing: feet as well where inches rule. */
+/** Long lengths of welt and boxing: in feet as well where inches rule, in metres where millimetres do. */
 export function runWords(mm: number, units: LengthStyle): string {
+  if (isMetric(units)) return `${formatLength(mm, units)} (${(mm / 1000).toFixed(2)}\u00a0m)`;
   if (units.system !== 'feet-inches') return formatLength(mm, units);
   return `${formatLength(mm, { ...units, feet: false })} (${formatLength(mm, { ...units, feet: true })})`;
 }

@@ -18,6 +18,7 @@ import {
   type TemplateTile,
   templateTiles,
 } from './template-tiles';
+import { TakenSpace } from './taken-space';
 import { frameOf } from './title-block';
 
 const CHECK_SQUARE_MM = 50.8;
@@ -149,6 +150,7 @@ function drawTile(sheet: Sheet, { pack, cushion, lines, tile, tiles, space }: Ti
   for (const [a, b] of stretchesIn(lines.cut, box))
     sheet.line(...at(a), ...at(b), { pen: PEN.fine, dash: [3, 2] });
   for (const [a, b] of stretchesIn(lines.finished, box)) sheet.line(...at(a), ...at(b), { pen: 0.5 });
+  const taken = new TakenSpace();
   for (const spot of lines.buttons) {
     const [x, y] = at(spot);
     if (x < frame.left + 4 || x > frame.right - 4 || y < frame.top + 4 || y > frame.top + space.heightMm - 4)
@@ -156,8 +158,9 @@ function drawTile(sheet: Sheet, { pack, cushion, lines, tile, tiles, space }: Ti
     sheet.circle(x, y, 4, { pen: PEN.fine });
     sheet.line(x - 6, y, x + 6, y, { pen: PEN.hair });
     sheet.line(x, y - 6, x, y + 6, { pen: PEN.hair });
+    taken.take({ x: x - 6, y: y - 6, width: 12, height: 12 });
   }
-  drawJoins(sheet, tile, tiles, { ...frame, bottom: frame.top + space.heightMm });
+  drawJoins(sheet, tile, tiles, { ...frame, bottom: frame.top + space.heightMm }, taken);
   drawTileSquare(sheet, lines, tile, { ...frame, bottom: frame.top + space.heightMm });
   const foot = frame.top + space.heightMm;
   sheet.line(frame.left, foot, frame.right, foot, { pen: PEN.fine });
@@ -203,12 +206,16 @@ function drawTileSquare(
   drawCheckSquare(sheet, best.x, best.y);
 }
 
+/** Where the name of a neighbour may stand when a button is marked in the middle of its edge. */
+const BESIDE_MIDDLE = [0, 22, -22] as const;
+
 /** Where neighbours begin, crosses that both show, and which sheet goes on. */
 function drawJoins(
   sheet: Sheet,
   tile: TemplateTile,
   tiles: readonly TemplateTile[],
   frame: { left: number; top: number; right: number; bottom: number },
+  taken: TakenSpace,
 ): void {
   const next = (column: number, row: number) =>
     tiles.find((one) => one.column === column && one.row === row && one.used);
@@ -223,13 +230,15 @@ function drawJoins(
     if (!name) return;
     sheet.line(inner, frame.top, inner, frame.bottom, style);
     for (const y of [frame.top + 30, frame.bottom - 30]) cross(x, y);
-    sheet.flag(`joins ${name}`, x + 1.15, midY, { angleDeg: 90, align: 'center', weight: 600 });
+    const places = BESIDE_MIDDLE.map((off) => ({ x: x + 1.15, y: midY + off }));
+    taken.write(sheet, `joins ${name}`, places, { angleDeg: 90, align: 'center', weight: 600 });
   };
   const level = (y: number, inner: number, name: string | undefined) => {
     if (!name) return;
     sheet.line(frame.left, inner, frame.right, inner, style);
     for (const x of [frame.left + 40, frame.right - 40]) cross(x, y);
-    sheet.flag(`joins ${name}`, midX, y + 1.15, { align: 'center', weight: 600 });
+    const places = BESIDE_MIDDLE.map((off) => ({ x: midX + off, y: y + 1.15 }));
+    taken.write(sheet, `joins ${name}`, places, { align: 'center', weight: 600 });
   };
   upright(frame.left + half, frame.left + TILE_OVERLAP_MM, next(tile.column - 1, tile.row)?.name);
   upright(frame.right - half, frame.right - TILE_OVERLAP_MM, next(tile.column + 1, tile.row)?.name);
