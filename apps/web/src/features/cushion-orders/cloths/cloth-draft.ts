@@ -10,7 +10,7 @@ import { moneyInput, readMoney } from '../life/money.ts';
 
 /** Which cushions a cloth covers. */
 export type Covered = 'all' | 'seat' | 'back' | 'marks';
-export type PartChoice = 'whole' | 'no-welt' | 'faces' | 'edges' | 'welt';
+export type PartChoice = 'whole' | 'no-welt' | 'no-faces' | 'no-edges' | 'faces' | 'edges' | 'welt';
 
 export const LENGTHS = [
   'width',
@@ -43,6 +43,8 @@ export interface ClothDraft extends Pick<OrderCover, 'name' | 'direction' | 'nap
 const PARTS: Record<PartChoice, CoverPart[] | undefined> = {
   whole: undefined,
   'no-welt': ['faces', 'edges'],
+  'no-faces': ['edges', 'welt'],
+  'no-edges': ['faces', 'welt'],
   faces: ['faces'],
   edges: ['edges'],
   welt: ['welt'],
@@ -71,7 +73,8 @@ export function draftOf(
   const from = cover ?? plainCover('');
   const { com, repeatMm, pricePerMetreMinor, currency = 'USD', cushionMarks, parts } = from;
   const { name, direction, nap, controlLine } = from;
-  const choice = (Object.keys(PARTS) as PartChoice[]).find((key) => PARTS[key]?.join() === parts?.join());
+  const sorted = (list: readonly CoverPart[] | undefined) => list && [...list].sort().join();
+  const choice = (Object.keys(PARTS) as PartChoice[]).find((key) => sorted(PARTS[key]) === sorted(parts));
   return {
     ...{ name, direction, nap, controlLine, currency },
     lengths: {

@@ -18,6 +18,8 @@ const COVERED: Record<Covered, string> = {
 const PARTS: Record<PartChoice, string> = {
   whole: 'the whole cover',
   'no-welt': 'all but the welt',
+  'no-faces': 'all but the faces',
+  'no-edges': 'all but the edges',
   faces: 'the faces only',
   edges: 'the edges only',
   welt: 'the welt only',
@@ -102,7 +104,7 @@ export function ClothFields({ per, ...form }: ClothFieldsProps) {
         label="Cut from it"
         value={draft.parts}
         options={optionsOf(PARTS)}
-        description="For welt in contrast, say one cloth for all but the welt and another for the welt."
+        description="For welt or edges in contrast, say one cloth for all but these and another for them."
         onChange={(parts) => onChange({ parts })}
       />
       {draft.covered === 'marks' && (

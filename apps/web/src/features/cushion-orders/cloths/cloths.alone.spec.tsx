@@ -93,6 +93,8 @@ describe('a cloth as it is typed', () => {
   it.each([
     ['as it is', MOQUETTE],
     ['with some cushions and parts', { ...MOQUETTE, cushionMarks: [mark], parts: ['welt' as const] }],
+    ['for the boxing and the welt', { ...MOQUETTE, parts: ['edges' as const, 'welt' as const] }],
+    ['for the faces and the welt', { ...MOQUETTE, parts: ['faces' as const, 'welt' as const] }],
     ['sent in', { ...MOQUETTE, com: { ...own, receivedOn: '2026-02-01' } }],
   ])('is kept %s', (_, cover) => {
     expect(readCloth(draftOf(cover, CUSHIONS, YARD), CUSHIONS, YARD)).toEqual({ cover });
