@@ -9,18 +9,22 @@ import {
 
 const MARGIN_MM = 60;
 
-/** A cut through the first bench that the order asks cushions for, with their marks and no sizes. */
+/** A cut through the first bench that the order asks cushions for, with all marks it meets and no sizes. */
 export function markedSections(
   document: SetDocument,
   cushions: readonly CushionSpec[],
-): { bench: string; drawing: Drawing }[] {
+): { benches: string[]; drawing: Drawing }[] {
   const [first] = cushions;
   if (!first) return [];
   const drawing = sectionOf(document, first.benchId, MARGIN_MM);
   const lines = drawing.shapes.filter(({ kind }) => kind !== 'dimension');
-  return [
-    { bench: first.benchMark, drawing: { ...drawing, shapes: [...lines, ...marksIn(lines, cushions)] } },
-  ];
+  const marks = marksIn(lines, cushions);
+  const met = new Set(marks.map(({ pieceId }) => pieceId));
+  const benches = new Set([
+    first.benchMark,
+    ...cushions.filter(({ benchId }) => met.has(benchId)).map(({ benchMark }) => benchMark),
+  ]);
+  return [{ benches: [...benches], drawing: { ...drawing, shapes: [...lines, ...marks] } }];
 }
 
 function marksIn(shapes: readonly DrawShape[], cushions: readonly CushionSpec[]): DrawShape[] {

@@ -1,4 +1,11 @@
-import { type OrderCover, orderModel, pictureFromAbove, plainCover, planOf } from '@settlewright/geometry';
+import {
+  describedClothName,
+  type OrderCover,
+  orderModel,
+  pictureFromAbove,
+  plainCover,
+  planOf,
+} from '@settlewright/geometry';
 import { Injectable } from '@nestjs/common';
 import { InjectSettings, type Settings } from '../config/settings';
 import type { SpecPackData } from '../paper/spec-pack';
@@ -16,8 +23,6 @@ import { bagLabels, specCushions } from './spec-cushions';
 
 /** Room for a mark that moves off its cushion. */
 const PLAN_MARGIN_MM = 60;
-/** A cover is named by the first words of what was written of it. */
-const NAME_LETTERS = 60;
 
 /** The paper of an order, made anew each time from the revision it cites. */
 @Injectable()
@@ -82,6 +87,5 @@ export class OrderPaper {
 
 /** Until the workshop says its cloths: a plain one of the usual width, so that there is a length to talk about. */
 function assumedCovers({ spec }: OrderContent): OrderCover[] {
-  const name = spec.cover.trim().replace(/\s+/g, ' ').slice(0, NAME_LETTERS);
-  return [plainCover(name || 'cover')];
+  return [plainCover(describedClothName(spec.cover))];
 }

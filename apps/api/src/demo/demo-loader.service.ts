@@ -153,6 +153,7 @@ export class DemoLoader implements OnApplicationBootstrap {
       title: wanted.title,
       neededBy: wanted.neededBy,
       cushionMarks: wanted.cushionMarks,
+      covers: wanted.covers,
       spec: wanted.spec,
     });
     const place = { workshopId: member.workshopId, productionId, orderId: order.id };

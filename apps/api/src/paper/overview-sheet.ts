@@ -12,6 +12,7 @@ import { type Frame, frameOf } from './title-block';
 
 const FACTS_WIDTH_MM = 118;
 const SIGN_MM = 14;
+const BY_NUMBER = new Intl.Collator('en', { numeric: true }).compare;
 /** Rows of cushions that share the first sheet with the drawings; longer lists get sheets of their own. */
 const LIST_SHARE = 0.42;
 
@@ -54,7 +55,7 @@ function drawDrawings(sheet: Sheet, pack: SpecPack, frame: Frame): void {
   sheet.text('Plan', x, frame.top + 6.2, { size: 10.5, weight: 600 });
   const scale = drawDrawing(sheet, pack.plan, pack.units, { x, y: frame.top + 13, ...box });
   sheet.text(`${scale.words}. Sizes govern.`, x, frame.top + 10.6);
-  const marks = [...new Set(pack.cushions.flatMap(({ benches }) => benches))];
+  const marks = [...new Set(pack.cushions.flatMap(({ benches }) => benches))].sort(BY_NUMBER);
   sheet.text(`${marksWords(marks)} from above and one side`, picture.x, picture.y + 6.2, { weight: 600 });
   drawDrawing(sheet, pack.picture, pack.units, { x: picture.x, y: picture.y + 13, ...box });
 }
@@ -135,7 +136,9 @@ function drawSection(
   if (!section) return;
   const room = { x: box.x, y: bar + 14, width: box.width, height: box.height - 30 };
   const cut = drawDrawing(sheet, section.drawing, pack.units, room);
-  sheet.text(`Section through ${section.bench}, ${cut.words}`, box.x, bar + 10, { weight: 600 });
+  sheet.text(`Section through ${marksWords(section.benches)}, ${cut.words}`, box.x, bar + 10, {
+    weight: 600,
+  });
 }
 
 function cushionCount(pack: SpecPack): string {

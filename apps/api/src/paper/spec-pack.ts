@@ -128,7 +128,7 @@ export interface SpecPackData {
   plan: Drawing;
   /** The benches of the order from above and one side. */
   picture: Drawing;
-  sections: readonly { bench: string; drawing: Drawing }[];
+  sections: readonly { benches: readonly string[]; drawing: Drawing }[];
 }
 
 /** A cloth of the order and, where its panels could be laid, how they lie. */

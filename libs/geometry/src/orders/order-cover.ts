@@ -72,6 +72,23 @@ export const orderCoversSchema = z
 
 export type OrderCover = z.infer<typeof orderCoverSchema>;
 
+/** Letters that a cloth named out of a description may have. */
+const NAME_LETTERS = 60;
+
+/**
+ * What a cloth is called that was only described: the words before the first comma, never cut within one.
+ *
+ * @param words - as they were written: "plum moquette, 54 in wide, pile to the front"
+ * @returns "cover" where nothing was written
+ */
+export function describedClothName(words: string): string {
+  const [first = ''] = words.trim().split(/\s*[,;\n]\s*/);
+  const name = first.replace(/\s+/g, ' ');
+  if (name.length <= NAME_LETTERS) return name || 'cover';
+  const whole = name.slice(0, NAME_LETTERS + 1).replace(/\s+\S*$/, '');
+  return whole.slice(0, NAME_LETTERS);
+}
+
 /**
  * A cloth of which nothing is known but its name: plain, bought by the eighth of a yard.
  *

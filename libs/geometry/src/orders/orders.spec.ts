@@ -6,7 +6,7 @@ import { ARRANGEMENTS } from '../room/arrangements.ts';
 import { chooseCushion } from '../room/cushion-choices.ts';
 import type { SetDocument } from '../room/document.ts';
 import { layCloth } from './order-cloth.ts';
-import { orderCoversSchema, plainCover, type OrderCover } from './order-cover.ts';
+import { describedClothName, orderCoversSchema, plainCover, type OrderCover } from './order-cover.ts';
 import { orderModel } from './order-model.ts';
 import { chartNote, orderAssumptions, rowsWords } from './order-words.ts';
 import { fromRunMiddleMm } from './run-middle.ts';
@@ -241,6 +241,18 @@ describe('what may be said of a cloth', () => {
     expect(read({ pricePerMetreMinor: 100 })).toEqual(['0.currency']);
     expect(read({ pricePerMetreMinor: 10.5, currency: 'USD' })).toEqual(['0.pricePerMetreMinor']);
     expect(orderCoversSchema.safeParse([cover(), cover()]).success).toBe(false);
+  });
+
+  it.each([
+    ['Plum moquette, supplied by us, 54 in wide, pile to the front', 'Plum moquette'],
+    ['  green   cord ', 'green cord'],
+    ['', 'cover'],
+    [
+      'a heavy woven cloth with a small raised figure in plum and oak and no name at all',
+      'a heavy woven cloth with a small raised figure in plum and',
+    ],
+  ])('is called by the first words of what was written of it: %s', (words, name) => {
+    expect(describedClothName(words)).toBe(name);
   });
 
   it('stands among the assumptions', () => {

@@ -1,4 +1,4 @@
-import { orderModel, plainCover } from '@settlewright/geometry';
+import { describedClothName, orderModel, plainCover } from '@settlewright/geometry';
 import { useMemo, useState } from 'react';
 import { Button } from '@/components/button.tsx';
 import { Notice } from '@/components/notice.tsx';
@@ -24,7 +24,11 @@ export default function ClothsSection({ path, order }: { path: OrderPath; order:
   const assumed = covers.length === 0;
   const model = useMemo(
     () =>
-      orderModel({ cushions, covers: assumed ? [plainCover(spec.cover.trim() || 'cover')] : covers, rules }),
+      orderModel({
+        cushions,
+        covers: assumed ? [plainCover(describedClothName(spec.cover))] : covers,
+        rules,
+      }),
     [cushions, covers, assumed, spec.cover, rules],
   );
   const mayEdit = canEdit && order.mayChange;
