@@ -89,7 +89,7 @@ function inOneCall({ people, seed }: { people: number; seed: number }): unknown 
     const draws = mixOf(civilians, civilians, WOMEN_PERCENT / 100).draw(people, seed);
     const { places } = measureSet(draft.document);
     const ruleBook = loadRuleBook(readSeedData('fit-rules'));
-    const shares = createStudy(draws, { places, ruleBook, wear: STUDY_WEAR }).shares();
+    const shares = createStudy(draws, { places, ruleBook, wear: STUDY_WEAR }).shares({ overDrop: true });
     counted.set(key, JSON.parse(JSON.stringify(shares)));
   }
   return counted.get(key);

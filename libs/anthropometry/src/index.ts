@@ -43,6 +43,7 @@ export { mergePartials, type FitTally, type Group, type PartialStudy, type Tally
 export type { Wear } from './studies/symbols.ts';
 export { CROWD_WEAR } from './studies/crowd-wear.ts';
 export * from './studies/shares.ts';
+export type { GroupShares, Share } from './studies/group-shares.ts';
 export type { Lost, LostTrait } from './studies/lost.ts';
 export { SURVEY_CAUTION, type Caution } from './studies/caution.ts';
 export * from './studies/curve.ts';

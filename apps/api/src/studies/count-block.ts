@@ -32,9 +32,8 @@ export function countBlock(
     wear: STUDY_WEAR,
     ticked: tickedStandIns(ticked, standIns),
   };
-  return createStudy(draws, { ...setup, ...(lensHeightMm === undefined ? {} : { lensHeightMm }) }).partial(
-    block,
-  );
+  const study = createStudy(draws, { ...setup, ...(lensHeightMm === undefined ? {} : { lensHeightMm }) });
+  return study.partial(block, { overDrop: true });
 }
 
 /** Shares of the whole study from the counts of all its blocks; every place has those of the one counted for it. */

@@ -5,6 +5,7 @@ import {
   tallyOf,
   type CellCount,
   type CheckCount,
+  type EndCounts,
   type FitTally,
   type Group,
   type PartialStudy,
@@ -21,6 +22,7 @@ import {
   type Ticks,
 } from './demands.ts';
 import type { PeopleSet } from './people-sets.ts';
+import { questionOf } from './question-of.ts';
 
 /** A rule at all ticked places. */
 interface Everywhere extends FitTally {
@@ -83,13 +85,7 @@ export function countStudy(studies: GroupStudies, ticks: Ticks, block: number): 
     question: questionOf(studies, checks),
     people: tallyOf((group) => studies[group].crowd.people),
     cells: cellsOf(studies),
-    places: studies.women.places
-      .map(({ placeId }) => placeId)
-      .filter(ticks.place)
-      .map((placeId) => ({
-        placeId,
-        ...countAll(studies, { ...ticks, place: (id) => id === placeId }),
-      })),
+    places: placesOf(studies, ticks),
     checks: checks.map((check, at) => checkCount(studies, check, checks.slice(at + 1), known)),
     all: countAll(studies, ticks),
     everyone: Object.fromEntries(
@@ -102,6 +98,25 @@ export function countStudy(studies: GroupStudies, ticks: Ticks, block: number): 
       ]),
     ),
   };
+}
+
+/**
+ * Counts with cushions at one end of how far they may go down.
+ *
+ * @param studies - people and questions by sex, the cushions at that end
+ * @param ticks - what counts
+ */
+export const countEnd = (studies: GroupStudies, ticks: Ticks): EndCounts => ({
+  ...countTicked(studies, ticks),
+  places: placesOf(studies, ticks),
+});
+
+function placesOf(studies: GroupStudies, ticks: Ticks): PartialStudy['places'] {
+  const placeIds = studies.women.places.map(({ placeId }) => placeId).filter(ticks.place);
+  return placeIds.map((placeId) => ({
+    placeId,
+    ...countAll(studies, { ...ticks, place: (id) => id === placeId }),
+  }));
 }
 
 function cellsOf(studies: GroupStudies): CellCount[] {
@@ -174,20 +189,4 @@ function checkCount(
       told.map((key) => [key, tallyOf((group) => studies[group].sets.sum(setOf(group, demands), key))]),
     ),
   };
-}
-
-const FNV_START = 0x811c9dc5;
-const FNV_PRIME = 0x01000193;
-
-/** A short name of what is asked: FNV-1a over the demands of both sexes. */
-function questionOf(studies: GroupStudies, checks: readonly Everywhere[]): string {
-  const words = [
-    ...checks.flatMap(({ ruleId, demands }) => [ruleId, demands.women.fits.key, demands.men.fits.key]),
-    ...GROUPS.flatMap((group) =>
-      studies[group].places.flatMap((place) => place.checks.map((check) => check.atLeastTight.key)),
-    ),
-  ].join('\n');
-  let hash = FNV_START;
-  for (let i = 0; i < words.length; i += 1) hash = Math.imul(hash ^ words.charCodeAt(i), FNV_PRIME);
-  return (hash >>> 0).toString(16).padStart(8, '0');
 }

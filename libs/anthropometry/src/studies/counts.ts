@@ -41,6 +41,13 @@ export interface CheckCount extends FitTally {
   sums: Partial<Record<MeasureKey, Tally>>;
 }
 
+/** Counts with every cushion at one end of how far it may go down. */
+export interface EndCounts {
+  places: (FitTally & { placeId: string })[];
+  checks: (FitTally & { ruleId: string })[];
+  all: FitTally;
+}
+
 /** What one part of a study counted: plain numbers that add up, whoever counted them. */
 export interface PartialStudy {
   /** Numbers of the blocks of people, rising. */
@@ -56,13 +63,18 @@ export interface PartialStudy {
   all: FitTally;
   /** Sums over everyone, in tenths and square tenths. */
   everyone: Partial<Record<MeasureKey, { sum: Tally; squares: Tally }>>;
+  /** The same with cushions that go down least and most; absent where it was not asked for or nobody sits on foam. */
+  overDrop?: Record<DropEnd, EndCounts>;
 }
+
+/** Ends of the 90 % range of a drop. */
+export type DropEnd = 'least' | 'most';
 
 /**
  * Puts the parts of one study together. Every number is whole, so the order does not matter.
  *
  * @param partials - parts of the same question over different blocks; at least one
- * @returns the whole
+ * @returns the whole; without the range of the drop where a part was counted without it
  * @throws RangeError when there is none, a block comes twice or the parts answer different questions
  */
 export function mergePartials(partials: readonly PartialStudy[]): PartialStudy {
@@ -75,7 +87,9 @@ export function mergePartials(partials: readonly PartialStudy[]): PartialStudy {
   if (stranger) {
     throw new RangeError(`Questions ${first.question} and ${stranger.question} differ; accepted: one`);
   }
-  return { ...rest.reduce(added, first), blocks };
+  const hasDrop = partials.every(({ overDrop }) => overDrop);
+  const parts = hasDrop ? partials : partials.map(({ overDrop: _, ...part }): PartialStudy => part);
+  return { ...parts.slice(1).reduce(added, parts[0] as PartialStudy), blocks };
 }
 
 /** Adds the numbers of two things of one shape. */

@@ -7,7 +7,8 @@ import { lensHeightMm, places, raised, soldiers, wear } from '../../test/study-p
 import { loadRuleBook } from '../checks/rule-book.ts';
 import type { Draws } from '../populations/population.ts';
 import { curveOf, mapOf, mergeCurves } from './curve.ts';
-import { groupShares, sharesOf, type GroupShares, type ShareOutcome } from './shares.ts';
+import { groupShares, type GroupShares } from './group-shares.ts';
+import { sharesOf, type ShareOutcome } from './shares.ts';
 import { createStudy } from './study.ts';
 
 const setup = { places, ruleBook, wear, lensHeightMm };

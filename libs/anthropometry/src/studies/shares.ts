@@ -1,6 +1,6 @@
-import { normalQuantile } from '../people/normal.ts';
 import { SURVEY_CAUTION, type Caution } from './caution.ts';
-import { GROUPS, type FitTally, type Group, type PartialStudy, type Tally } from './counts.ts';
+import { GROUPS, type FitTally, type PartialStudy, type Tally } from './counts.ts';
+import { groupShares, type GroupShares } from './group-shares.ts';
 import { lostBy, mixedLost, type Lost } from './lost.ts';
 
 /** Share of each sex; need not add to 1. */
@@ -14,21 +14,21 @@ export interface ShareSetup {
   surveyed?: Partial<Tally>;
 }
 
-/** A share from 0 to 1 with the range that holds it 95 times in 100. */
-export interface Share {
-  value: number;
+/** Least and most of a share of both sexes as they are mixed: with cushions that go down least, as is best known, or most. */
+export interface DropSpan {
   low: number;
   high: number;
 }
 
-/** A share of each sex that was drawn, and of both as they are mixed. */
-export interface GroupShares extends Partial<Record<Group, Share>> {
-  mixed: Share;
-}
-
 /** What a study says of a rule, a place or all at once. */
 export type ShareOutcome =
-  | { kind: 'shares'; fits: GroupShares; atLeastTight: GroupShares }
+  | {
+      kind: 'shares';
+      fits: GroupShares;
+      atLeastTight: GroupShares;
+      /** Absent where it was not counted, or where it moves nobody over a line. */
+      overDrop?: { fits: DropSpan; atLeastTight: DropSpan };
+    }
   | { kind: 'silent'; reason: string }
   /** A measure that is read is not known of these people: never a share, never a pass. */
   | { kind: 'notKnown' };
@@ -55,9 +55,6 @@ export interface StudyShares {
   caution: Caution;
 }
 
-const RANGE = 0.95;
-const Z = normalQuantile(0.5 + RANGE / 2);
-
 /**
  * Shares from the counts of a study.
  *
@@ -68,28 +65,52 @@ const Z = normalQuantile(0.5 + RANGE / 2);
  */
 export function sharesOf(counts: PartialStudy, setup: ShareSetup = {}): StudyShares {
   const weights = weightsOf(counts.people, setup.mix);
-  const outcomeOf = (tally: FitTally): ShareOutcome => {
+  const { overDrop } = counts;
+  const spanOf = (tallies: readonly Tally[]): DropSpan => {
+    const values = tallies.map((tally) => 1 - mixedLost(tally, counts.people, weights));
+    return { low: Math.min(...values), high: Math.max(...values) };
+  };
+  const outcomeOf = (tally: FitTally, ends: readonly FitTally[]): ShareOutcome => {
     if (tally.silent !== undefined) return { kind: 'silent', reason: tally.silent };
     if (tally.unknown) return { kind: 'notKnown' };
+    const [fits, atLeastTight] = (['fits', 'atLeastTight'] as const).map((name) =>
+      spanOf([tally, ...ends].map((end) => end[name])),
+    ) as [DropSpan, DropSpan];
+    const moves = fits.low < fits.high || atLeastTight.low < atLeastTight.high;
     return {
       kind: 'shares',
       fits: groupShares(tally.fits, counts.people, weights, setup.surveyed),
       atLeastTight: groupShares(tally.atLeastTight, counts.people, weights, setup.surveyed),
+      ...(moves && { overDrop: { fits, atLeastTight } }),
     };
   };
+  const ends = overDrop ? [overDrop.least, overDrop.most] : [];
   return {
     people: counts.people,
     cells: counts.cells.map(({ placeId, ruleId, ...tally }) => ({
       placeId,
       ruleId,
-      outcome: outcomeOf(tally),
+      outcome: outcomeOf(tally, []),
     })),
-    places: counts.places.map(({ placeId, ...tally }) => ({ placeId, outcome: outcomeOf(tally) })),
-    checks: counts.checks.map((check) => {
+    places: counts.places.map(({ placeId, ...tally }, n) => ({
+      placeId,
+      outcome: outcomeOf(
+        tally,
+        ends.flatMap(({ places }) => places[n] ?? []),
+      ),
+    })),
+    checks: counts.checks.map((check, n) => {
       const lost = lostBy(check, counts, weights);
-      return { ruleId: check.ruleId, outcome: outcomeOf(check), ...(lost ? { lost } : {}) };
+      const outcome = outcomeOf(
+        check,
+        ends.flatMap(({ checks }) => checks[n] ?? []),
+      );
+      return { ruleId: check.ruleId, outcome, ...(lost ? { lost } : {}) };
     }),
-    all: outcomeOf(counts.all),
+    all: outcomeOf(
+      counts.all,
+      ends.map(({ all }) => all),
+    ),
     ...rejections(counts, weights),
     caution: SURVEY_CAUTION,
   };
@@ -113,49 +134,6 @@ export function weightsOf(people: Tally, mix: Mix = people): Tally {
     }
   }
   return { women: mix.women / sum, men: mix.men / sum };
-}
-
-/**
- * Share of each sex and of both together, with its range: Wilson's interval for the people drawn, and for the people
- * surveyed where their number is given.
- *
- * @param tally - people who fit
- * @param people - people drawn
- * @param weights - adding to 1
- * @param surveyed - people behind the body data
- */
-export function groupShares(
-  tally: Tally,
-  people: Tally,
-  weights: Tally,
-  surveyed: Partial<Tally> = {},
-): GroupShares {
-  const shares: Partial<Record<Group, Share>> = {};
-  let value = 0;
-  let variance = 0;
-  let unitVariance = 0;
-  for (const group of GROUPS) {
-    if (people[group] === 0) continue;
-    const own = tally[group] / people[group];
-    const perPerson = 1 / people[group] + 1 / (surveyed[group] ?? Infinity);
-    shares[group] = wilson(own, 1 / perPerson);
-    value += weights[group] * own;
-    variance += weights[group] ** 2 * own * (1 - own) * perPerson;
-    unitVariance += weights[group] ** 2 * perPerson;
-  }
-  const trials = variance > 0 ? (value * (1 - value)) / variance : 1 / unitVariance;
-  return { ...shares, mixed: wilson(value, trials) };
-}
-
-function wilson(share: number, trials: number): Share {
-  const z2 = (Z * Z) / trials;
-  const middle = (share + z2 / 2) / (1 + z2);
-  const half = (Z * Math.sqrt((share * (1 - share)) / trials + z2 / (4 * trials))) / (1 + z2);
-  return {
-    value: share,
-    low: Math.max(0, Math.min(share, middle - half)),
-    high: Math.min(1, Math.max(share, middle + half)),
-  };
 }
 
 function rejections(counts: PartialStudy, weights: Tally): Pick<StudyShares, 'rejectsMost' | 'rejectsNext'> {

@@ -2,10 +2,18 @@ import type { RuleBook } from '../checks/rule-book.ts';
 import type { PlaceSituation } from '../checks/situation.ts';
 import type { Draws } from '../populations/population.ts';
 import { compilePlace, type CompiledPlace } from './compile.ts';
-import { countAll, countStudy, countTicked } from './count-study.ts';
-import { mergePartials, type FitTally, type Group, type PartialStudy } from './counts.ts';
+import { countAll, countEnd, countStudy, countTicked } from './count-study.ts';
+import {
+  mergePartials,
+  type DropEnd,
+  type EndCounts,
+  type FitTally,
+  type Group,
+  type PartialStudy,
+} from './counts.ts';
 import { createCrowd } from './crowd.ts';
 import type { GroupStudies, GroupStudy, Ticks } from './demands.ts';
+import { placesAtDrop } from './drop-ends.ts';
 import { createPeopleSets } from './people-sets.ts';
 import { sharesOf, type ShareSetup, type StudyShares } from './shares.ts';
 import type { Wear } from './symbols.ts';
@@ -27,16 +35,27 @@ export interface StudySetup extends ShareSetup {
   ticked?: Ticked;
 }
 
+/** What a study counts besides. */
+export interface Counting {
+  /** Counts again with cushions that go down least and most: three times the work. */
+  overDrop?: boolean;
+}
+
 /** How many people of a population a set fits. */
 export interface Study {
-  /** Shares of each rule, of all ticked ones at once, and who is lost. */
-  shares(): StudyShares;
+  /**
+   * Shares of each rule, of all ticked ones at once, and who is lost.
+   *
+   * @param counting - as for `partial`
+   */
+  shares(counting?: Counting): StudyShares;
   /**
    * What this study counted, to be put together by `mergePartials` with the counts of other blocks of people.
    *
    * @param block - number of its block, 0 for a study that is not split
+   * @param counting - what is counted besides
    */
-  partial(block?: number): PartialStudy;
+  partial(block?: number, counting?: Counting): PartialStudy;
   /** Changes what counts for "all at once". */
   tick(ticked: Ticked): void;
   /** Puts changed places before the same people: only what moved is counted again. */
@@ -90,26 +109,33 @@ export function createStudy(draws: Draws, setup: StudySetup): Study {
     base.men.crowd.sortNeeds();
   };
 
-  let studies = at(setup.places);
+  let { places } = setup;
+  let studies = at(places);
   let ticks = ticksOf(setup.ticked);
-  const partial = (block = 0): PartialStudy => countStudy(studies, ticks, block);
+  const endOf = (end: DropEnd): EndCounts => countEnd(at(placesAtDrop(places, end)), ticks);
+  const partial = (block = 0, { overDrop = false }: Counting = {}): PartialStudy => ({
+    ...countStudy(studies, ticks, block),
+    ...(overDrop &&
+      places.some(({ foam }) => foam) && { overDrop: { least: endOf('least'), most: endOf('most') } }),
+  });
   return {
     partial,
-    shares: () => sharesOf(mergePartials([partial()]), setup),
+    shares: (counting) => sharesOf(mergePartials([partial(0, counting)]), setup),
     tick(ticked) {
       ticks = ticksOf(ticked);
     },
-    move(places) {
+    move(moved) {
       expectMoves();
+      places = moved;
       studies = at(places);
     },
-    countAt(places) {
+    countAt(tried) {
       expectMoves();
-      return countTicked(at(places), ticks);
+      return countTicked(at(tried), ticks);
     },
-    countAllAt(places) {
+    countAllAt(tried) {
       expectMoves();
-      return countAll(at(places), ticks);
+      return countAll(at(tried), ticks);
     },
   };
 }

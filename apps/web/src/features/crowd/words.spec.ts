@@ -1,7 +1,16 @@
 import { loadRuleBook } from '@settlewright/anthropometry';
 import rules from '@settlewright/seed-data/fit-rules.json';
 import { describe, expect, it } from 'vitest';
-import { fineWords, isAbout, ofHundred, rangeWords, rejectionWords, sexWords } from './words.ts';
+import {
+  fineWords,
+  isAbout,
+  ofHundred,
+  overDropWords,
+  rangeWords,
+  rejectionWords,
+  sexWords,
+  tenth,
+} from './words.ts';
 
 const ruleBook = loadRuleBook(rules);
 const share = (value: number) => ({ value, low: value, high: value });
@@ -35,6 +44,13 @@ describe('shares in words', () => {
     [{ value: 0.9999, low: 0.9999, high: 0.9999 }, 'More than 99.9 in 100'],
     [{ value: 1, low: 1, high: 1 }, 'All of 100'],
   ])('tells a large count to a tenth: %o', (value, words) => expect(fineWords(value)).toBe(words));
+
+  it('tells what a drop does where it shows', () => {
+    expect(overDropWords({ low: 0.281, high: 0.393 })).toBe('28 to 39 over the drop');
+    expect(overDropWords({ low: 0.281, high: 0.284 })).toBeUndefined();
+    expect(overDropWords({ low: 0.281, high: 0.284 }, tenth)).toBe('28.1 to 28.4 over the drop');
+    expect(overDropWords(undefined)).toBeUndefined();
+  });
 
   it('tells the sexes apart only where there are both', () => {
     expect(sexWords({ mixed: share(0.3), women: share(0.4), men: share(0.2) })).toBe('women 40, men 20');

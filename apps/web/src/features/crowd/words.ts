@@ -1,4 +1,4 @@
-import type { GroupShares, Rejection, RuleBook, Share } from '@settlewright/anthropometry';
+import type { DropSpan, GroupShares, Rejection, RuleBook, Share } from '@settlewright/anthropometry';
 import { CROWD_WEAR } from '@/lib/crowd/crowds.ts';
 
 /** "34", "fewer than 1", "more than 99": people of 100, rounded so that few are never none. */
@@ -16,6 +16,16 @@ export const isAbout = ({ value }: Pick<Share, 'value'>): boolean => /^[1-9]/.te
 export function rangeWords({ low, high }: Pick<Share, 'low' | 'high'>): string {
   const [from, to] = [Math.round(low * 100), Math.round(high * 100)];
   return from === to ? 'Counting alone moves it by less than 1' : `${from} to ${to} by counting alone`;
+}
+
+/** "28 to 39 over the drop": what the range of how far cushions go down does to a share; nothing where it rounds away. */
+export function overDropWords(
+  span: DropSpan | undefined,
+  told = (value: number) => ofHundred({ value }),
+): string | undefined {
+  if (!span) return undefined;
+  const [low, high] = [told(span.low), told(span.high)];
+  return low === high ? undefined : `${low} to ${high} over the drop`;
 }
 
 /** "women 41, men 27"; nothing for people of one sex. */
@@ -42,7 +52,13 @@ export function rejectionWords(
 /** What everybody of the crowd wears. */
 export const WEAR_WORDS = `Everybody wears shoes of ${CROWD_WEAR.shoeMm} mm and ${CROWD_WEAR.clothing} clothes, sits upright with the back against the rest, and presses the cushion by their own weight.`;
 
-const tenth = (share: number): string => (share * 100).toFixed(1);
+/** What "over the drop" means. */
+export const OVER_DROP_WORDS =
+  'Shares take how far a cushion goes down at its best value. “Over the drop” is the same count with every cushion ' +
+  'going down least and most, as far as 90 of 100 cases reach; test sits narrow it.';
+
+/** Of 100 people, to a tenth. */
+export const tenth = (share: number): string => (share * 100).toFixed(1);
 
 /** "About 34.2 in 100 (34.1 to 34.3)", for counts so large that tenths mean something. */
 export function fineWords({ value, low, high }: Share): string {

@@ -81,7 +81,7 @@ export function createCrowdDesk(): CrowdDesk {
   } = {
     async shares({ places, ...asked }) {
       const { study, population } = await studyOf(asked, places);
-      return { ...study.shares(), told: toldOf(population) };
+      return { ...study.shares({ overDrop: true }), told: toldOf(population) };
     },
     async curve({ values, placesAt, ...asked }) {
       const { study, population, draws } = await studyOf(asked, placesAt[0] ?? []);

@@ -1,5 +1,5 @@
 import type { ShareOutcome } from '@settlewright/anthropometry';
-import { isAbout, ofHundred, rangeWords, sexWords } from '../words.ts';
+import { isAbout, ofHundred, overDropWords, rangeWords, sexWords } from '../words.ts';
 
 interface AllAtOnceProps {
   outcome: ShareOutcome;
@@ -18,7 +18,8 @@ export function AllAtOnce({ outcome, checks, of }: AllAtOnceProps) {
       </p>
     );
   }
-  const { fits, atLeastTight } = outcome;
+  const { fits, atLeastTight, overDrop } = outcome;
+  const drop = overDropWords(overDrop?.fits);
   const sexes = sexWords(fits);
   const value = ofHundred(fits.mixed);
   const counted = checks === of ? 'all checks at once' : `${checks} of ${of} checks at once`;
@@ -31,6 +32,7 @@ export function AllAtOnce({ outcome, checks, of }: AllAtOnceProps) {
       </p>
       <p className="mt-1 text-ink-2">
         {rangeWords(fits.mixed)}
+        {drop && `, ${drop}`}
         {sexes && `; ${sexes}`}. At least tight: {ofHundred(atLeastTight.mixed)} in 100.
       </p>
     </div>

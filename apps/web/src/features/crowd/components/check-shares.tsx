@@ -1,9 +1,9 @@
-import { PERSON_CHECKS, type Lost } from '@settlewright/anthropometry';
+import { PERSON_CHECKS, type DropSpan, type Lost } from '@settlewright/anthropometry';
 import { RuleHeading } from '@/components/rule-heading.tsx';
 import { Button } from '@/components/button.tsx';
 import { useCrowdView } from '../crowd-view.ts';
 import type { Shares } from '../use-shares.ts';
-import { ofHundred, sexWords } from '../words.ts';
+import { ofHundred, overDropWords, sexWords } from '../words.ts';
 import { ShareBar } from './share-bar.tsx';
 
 interface CheckSharesProps {
@@ -58,6 +58,7 @@ export function CheckShares({ checks, ticked, onTick }: CheckSharesProps) {
                 <p className="text-sm">
                   <strong className="font-semibold">{ofHundred(outcome.fits.mixed)} fit</strong>,{' '}
                   {ofHundred(outcome.atLeastTight.mixed)} at least tight
+                  <OverDrop span={outcome.overDrop?.fits} />
                 </p>
                 <p className="text-sm text-ink-2">
                   {lostWords(lost)}
@@ -77,6 +78,11 @@ export function CheckShares({ checks, ticked, onTick }: CheckSharesProps) {
       <Silent told={all} />
     </section>
   );
+}
+
+function OverDrop({ span }: { span: DropSpan | undefined }) {
+  const words = overDropWords(span);
+  return words && <span className="block text-ink-2">{words}</span>;
 }
 
 const lostWords = (lost: Lost | undefined): string =>

@@ -2,7 +2,7 @@ import { CAUTION } from '@/lib/caution.ts';
 import { RuleHeading } from '@/components/rule-heading.tsx';
 import { sentence } from '@/lib/dimension-words.ts';
 import type { Shares } from '../use-shares.ts';
-import { WEAR_WORDS } from '../words.ts';
+import { OVER_DROP_WORDS, WEAR_WORDS } from '../words.ts';
 
 interface CrowdCautionProps {
   /** "US adults 2015–16, men and women equally". */
@@ -26,6 +26,7 @@ export function CrowdCaution({ name, shares: { told, people, caution } }: CrowdC
           {(people.women + people.men).toLocaleString('en-GB')} people were drawn,{' '}
           {people.women.toLocaleString('en-GB')} of them women. {WEAR_WORDS}
         </p>
+        <p>{OVER_DROP_WORDS}</p>
         <p>{sentence(caution.words)}</p>
         <p className="text-ink-3">Source: {sentence(caution.source)}</p>
         <p>{CAUTION}</p>

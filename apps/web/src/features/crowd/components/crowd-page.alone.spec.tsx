@@ -55,6 +55,7 @@ describe('who fits', () => {
     expect(within(people).getByText(/Guidance, not certification/)).toBeVisible();
     const checks = screen.getByRole('region', { name: 'Check by check' });
     expect(within(checks).getAllByText(/^Lost: /).length).toBeGreaterThan(0);
+    expect(within(checks).getAllByText(/^\d+ to \d+ over the drop$/).length).toBeGreaterThan(0);
     expect(screen.getByRole('region', { name: 'Place by place' })).toHaveTextContent('B1, place 1');
   });
 
@@ -143,12 +144,20 @@ describe('who fits', () => {
         people: 1_000_000,
         startedBy: { id: 'u1', name: 'Nell Abara' },
         startedAt: '2026-01-20T10:00:00Z',
-        outcome: { kind: 'shares', fits: { mixed: { value: 0.3424, low: 0.3415, high: 0.3433 } } },
+        outcome: {
+          kind: 'shares',
+          fits: { mixed: { value: 0.3424, low: 0.3415, high: 0.3433 } },
+          overDrop: { fits: { low: 0.281, high: 0.393 } },
+        },
       },
     ];
     show();
     expect(
-      await screen.findByText(/About 34.2 in 100 \(34.2 to 34.3\) fit all checks at once/, {}, COUNTED),
+      await screen.findByText(
+        /\(34.2 to 34.3\) fit all checks at once; 28.1 to 39.3 over the drop/,
+        {},
+        COUNTED,
+      ),
     ).toBeVisible();
     expect(screen.queryByRole('button', { name: 'Count a million' })).toBeNull();
   });

@@ -2,7 +2,7 @@ import type { ServerStudy } from '@/lib/contract.ts';
 import { useOwnSurveys } from '@/lib/crowd/own-crowds.ts';
 import { momentWords } from '@/lib/dates.ts';
 import { studyPeople } from '../study-people.ts';
-import { fineWords } from '../words.ts';
+import { fineWords, overDropWords, tenth } from '../words.ts';
 
 interface EndedStudyProps {
   study: ServerStudy;
@@ -35,7 +35,8 @@ function foundWords({ state, outcome, fault, ruleIds }: ServerStudy): string {
   const checks = ruleIds
     ? `${ruleIds.length} ${ruleIds.length === 1 ? 'check' : 'checks at once'}`
     : 'all checks at once';
-  return `${fineWords(outcome.fits.mixed)} fit ${checks}`;
+  const drop = overDropWords(outcome.overDrop?.fits, tenth);
+  return `${fineWords(outcome.fits.mixed)} fit ${checks}${drop ? `; ${drop}` : ''}`;
 }
 
 function documentWords({ revisionLetter, draftNumber }: ServerStudy, shown: number): string {

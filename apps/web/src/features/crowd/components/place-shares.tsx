@@ -1,7 +1,7 @@
 import { RuleHeading } from '@/components/rule-heading.tsx';
 import { useCrowdView } from '../crowd-view.ts';
 import type { Shares } from '../use-shares.ts';
-import { ofHundred } from '../words.ts';
+import { ofHundred, overDropWords } from '../words.ts';
 import { ShareBar } from './share-bar.tsx';
 
 /** Ticked checks at once, place by place. */
@@ -15,6 +15,7 @@ export function PlaceShares({ places }: { places: Shares['places'] }) {
       <ul className="grid gap-x-10 tablet:grid-cols-2">
         {places.map(({ placeId, outcome }) => {
           const [pieceId, place] = placeId.split(':');
+          const drop = outcome.kind === 'shares' ? overDropWords(outcome.overDrop?.fits) : undefined;
           return (
             <li
               key={placeId}
@@ -29,6 +30,7 @@ export function PlaceShares({ places }: { places: Shares['places'] }) {
                   <span className="text-sm max-phone:col-start-2">
                     {ofHundred(outcome.fits.mixed)} fit, {ofHundred(outcome.atLeastTight.mixed)} at least
                     tight
+                    {drop && <span className="block text-ink-2">{drop}</span>}
                   </span>
                 </>
               ) : (
