@@ -176,16 +176,18 @@ function drawPanelWords(
   const width = sheet.textWidth(text, { size });
   const style = { align: 'center' as const, size, ...(width + 1 >= long && { angleDeg: 90 }) };
   const down = size * 0.128;
+  // Beside the arrow, where there is room for one.
+  const aside = width + 8 < long ? 1.5 : 0;
   const places = SHARES.map((share): Point =>
     style.angleDeg
       ? [(box.x0 + box.x1) / 2 + down, box.y0 + share * high]
-      : [box.x0 + share * long - 1.5, (box.y0 + box.y1) / 2 + down],
+      : [box.x0 + share * long - aside, (box.y0 + box.y1) / 2 + down],
   );
   const place = places.find((at) => taken.isFree(wordsBox(sheet, text, ...at, style)));
   if (!place) return;
   taken.take(wordsBox(sheet, text, ...place, style));
   sheet.text(text, ...place, style);
-  const [x, y] = style.angleDeg ? [place[0] - down, place[1]] : [place[0] + 1.5, place[1] - down];
+  const [x, y] = style.angleDeg ? [place[0] - down, place[1]] : [place[0] + aside, place[1] - down];
   // The panel's own up.
   const tip: Point = panel.railroaded ? [x + width / 2 + 2, y - 1.6] : [x + width / 2 + 3.6, y];
   const [dx, dy] = panel.railroaded ? [0, -1] : [1, 0];

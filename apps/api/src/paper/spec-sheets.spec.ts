@@ -3,6 +3,7 @@ import fc from 'fast-check';
 import { jsPDF } from 'jspdf';
 import { curveWords, scaleFor } from '@settlewright/geometry';
 import { CHECK_BAR_MM, drawCheckBar } from './check-bar';
+import { drawClothWay } from './cloth-way';
 import { type Chain, chainDepth, drawChain } from './dimension-chain';
 import { breakLines } from './paragraph';
 import { spaces } from './cushion-chains';
@@ -52,6 +53,31 @@ describe('words on a sheet', () => {
     const places = [0, 22].map((off) => ({ x: 100 + off, y: 51 }));
     expect(taken.write(sheet, 'joins B1', places, { align: 'center' })).toBe(true);
     expect(sheet.labels.map(({ left, right }) => (left + right) / 2)).toEqual([122]);
+  });
+});
+
+describe('the way of the cloth', () => {
+  const cloth = { direction: 'up-roll', nap: 'down', words: '' } as const;
+  const figure = { x: 20, y: 20, width: 90, height: 36 };
+  /** Buttons every 20.6 by 12.2 mm, as on a seat at 1 : 12. */
+  const dense = () => {
+    const taken = new TakenSpace();
+    for (const x of [31, 51.6, 72.2, 92.8]) {
+      for (const y of [32.2, 44.4]) taken.take({ x: x - 2.6, y: y - 1.8, width: 5.2, height: 3.6 });
+    }
+    return taken;
+  };
+
+  it('is shown between buttons too, by smaller arrows', () => {
+    const arrows = (taken: TakenSpace) => {
+      const sheet = newSheet();
+      drawClothWay(sheet, cloth, figure, taken);
+      return sheet.lines.map(([x1, y1, x2, y2]) => Math.hypot(x2 - x1, y2 - y1));
+    };
+    const [open, between] = [arrows(new TakenSpace()), arrows(dense())];
+    expect(open).toHaveLength(2);
+    expect(between).toHaveLength(2);
+    expect(between[0]).toBeLessThan(open[0]!);
   });
 });
 
