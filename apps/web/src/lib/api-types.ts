@@ -4291,12 +4291,13 @@ export interface components {
         };
         CushionWarningDto: {
             /** @enum {string} */
-            code: "off-joint" | "buttons-outside" | "closure-on-camera-side";
+            code: "off-joint" | "buttons-outside" | "beyond-place" | "closure-on-camera-side";
             columns?: number;
             furthestMm?: number;
             count?: number;
             /** @enum {string} */
             edge?: "back" | "front" | "left" | "right";
+            edges?: ("back" | "front" | "left" | "right")[];
         };
         TestedCushionDto: {
             thicknessMm: number;

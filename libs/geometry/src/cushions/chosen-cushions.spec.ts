@@ -173,6 +173,41 @@ describe('tufting', () => {
     const outside = spec.warnings.find(({ code }) => code === 'buttons-outside');
     expect(outside).toMatchObject({ count: expect.any(Number) as number });
   });
+
+  it('keeps buttons on their boards whatever outline is drawn round them', () => {
+    const plain = chosen('bench-window', 'back', {}).spec;
+    const { widthMm, depthMm } = plain.finishedMm;
+    const drawn = [
+      { xMm: 0, yMm: 0, radiusMm: 0, edge: 'front' as const },
+      { xMm: widthMm - 40, yMm: 0, radiusMm: 0, edge: 'left' as const },
+      { xMm: widthMm - 40, yMm: depthMm - 30, radiusMm: 0, edge: 'back' as const },
+      { xMm: 0, yMm: depthMm - 30, radiusMm: 0, edge: 'right' as const },
+    ];
+    const { spec } = chosen('bench-window', 'back', { shape: { drawn } });
+    expect(spec.finishedMm.widthMm).toBeCloseTo(widthMm - 40, 9);
+    expect(buttonSpots(spec)).toEqual(buttonSpots(plain));
+  });
+
+  it('keeps a drawn outline within its place, or says where and how far it does not', () => {
+    const { widthMm, depthMm } = chosen('bench-window', 'seat', {}).spec.finishedMm;
+    const drawn = (wide: number) =>
+      chosen('bench-window', 'seat', {
+        shape: {
+          drawn: [
+            { xMm: 0, yMm: 0, radiusMm: 0, edge: 'front' },
+            { xMm: wide, yMm: 0, radiusMm: 0, edge: 'left' },
+            { xMm: wide, yMm: depthMm, radiusMm: 0, edge: 'back' },
+            { xMm: 0, yMm: depthMm, radiusMm: 0, edge: 'right' },
+          ],
+        },
+      }).spec.warnings;
+    expect(drawn(widthMm)).toEqual([]);
+    const [warning] = drawn(widthMm + inch(3 / 8));
+    expect(warning).toMatchObject({ code: 'beyond-place', edges: ['left'] });
+    expect(cushionWarningWords(warning!, INCHES)).toBe(
+      'The drawn outline goes ⅜″ beyond its place at the left.',
+    );
+  });
 });
 
 describe('rows over the pressed seat', () => {

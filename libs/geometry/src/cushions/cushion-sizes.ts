@@ -1,10 +1,24 @@
 import { CUSHION_SETTINGS, type CushionSettings } from './cushion-settings.ts';
+import type { CushionSpec } from './cushion-spec.ts';
 
 /** Width along the seat, depth from back to front (height of a back cushion), thickness. */
 export interface CushionSize {
   widthMm: number;
   depthMm: number;
   thicknessMm: number;
+}
+
+/**
+ * The size that fits a place, seam to seam: never below a millimetre.
+ *
+ * @param spec - place, wood to wood, and what each edge takes off it
+ */
+export function fittingSize({ placeMm, gapsMm }: Pick<CushionSpec, 'placeMm' | 'gapsMm'>): CushionSize {
+  return {
+    widthMm: Math.max(1, placeMm.widthMm - gapsMm.left - gapsMm.right),
+    depthMm: Math.max(1, placeMm.depthMm - gapsMm.back - gapsMm.front),
+    thicknessMm: placeMm.thicknessMm,
+  };
 }
 
 /**

@@ -4,4 +4,6 @@ import type { CushionEdge } from './cushion-choice.ts';
 export type CushionWarning =
   | { code: 'off-joint'; columns: number; furthestMm: number }
   | { code: 'buttons-outside'; count: number }
+  /** A drawn outline goes further than the size that fits its place. */
+  | { code: 'beyond-place'; edges: CushionEdge[]; furthestMm: number }
   | { code: 'closure-on-camera-side'; edge: CushionEdge };

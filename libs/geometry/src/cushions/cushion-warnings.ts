@@ -1,6 +1,7 @@
 import { outlinePoints, type OutlineCorner, type Point2 } from '../outlines/outline.ts';
 import { formatLength } from '../units/format-length.ts';
 import type { LengthStyle } from '../units/length-style.ts';
+import { fittingSize } from './cushion-sizes.ts';
 import type { ButtonTable, CushionSpec } from './cushion-spec.ts';
 import type { CushionWarning } from './cushion-warning.ts';
 
@@ -8,9 +9,9 @@ import type { CushionWarning } from './cushion-warning.ts';
 export const OFF_JOINT_MM = 3.175;
 
 /** Where each button stands on the plan: back edge up, sitter's left at the right, from the lower left corner. */
-export function buttonSpots(spec: Pick<CushionSpec, 'buttons' | 'datum' | 'finishedMm'>): Point2[] {
+export function buttonSpots(spec: Pick<CushionSpec, 'buttons' | 'datum' | 'placeMm' | 'gapsMm'>): Point2[] {
   const { columns, rowsMm, pattern } = spec.buttons;
-  const { widthMm, depthMm } = spec.finishedMm;
+  const { widthMm, depthMm } = fittingSize(spec);
   return rowsMm.flatMap((row, r) =>
     columns.flatMap(({ fromSeamMm }, c): Point2[] => {
       if (pattern === 'staggered' && c % 2 !== r % 2) return [];
@@ -26,9 +27,11 @@ export function buttonSpots(spec: Pick<CushionSpec, 'buttons' | 'datum' | 'finis
  * @returns warnings as data; see `cushionWarningWords`
  */
 export function cushionWarnings(
-  spec: Pick<CushionSpec, 'buttons' | 'datum' | 'finishedMm' | 'outline' | 'make' | 'cameraSides'> & {
+  spec: Pick<CushionSpec, 'buttons' | 'datum' | 'placeMm' | 'gapsMm' | 'outline' | 'make' | 'cameraSides'> & {
     /** Whether columns are meant to stand on joints. */
     onJoints: boolean;
+    /** Whether the outline was drawn freely; a taper that goes out is meant to. */
+    drawn: boolean;
   },
 ): CushionWarning[] {
   const { make, cameraSides } = spec;
@@ -37,6 +40,7 @@ export function cushionWarnings(
   return [
     ...(spec.onJoints ? offJoint(spec.buttons) : []),
     ...(outside > 0 ? [{ code: 'buttons-outside' as const, count: outside }] : []),
+    ...(spec.drawn ? beyondPlace(spec) : []),
     ...(open && cameraSides.includes(open) ? [{ code: 'closure-on-camera-side' as const, edge: open }] : []),
   ];
 }
@@ -44,6 +48,27 @@ export function cushionWarnings(
 function offJoint({ columns }: ButtonTable): CushionWarning[] {
   const off = columns.map(({ offJointMm }) => Math.abs(offJointMm)).filter((mm) => mm > OFF_JOINT_MM + 1e-6);
   return off.length === 0 ? [] : [{ code: 'off-joint', columns: off.length, furthestMm: Math.max(...off) }];
+}
+
+/** Less than half a millimetre is drawing, not cloth. */
+const BEYOND_MM = 0.5;
+
+function beyondPlace(spec: Pick<CushionSpec, 'outline' | 'placeMm' | 'gapsMm'>): CushionWarning[] {
+  const { outline } = spec;
+  const { widthMm, depthMm } = fittingSize(spec);
+  const xs = outline.map(({ at }) => at[0]);
+  const ys = outline.map(({ at }) => at[1]);
+  const beyond = (
+    [
+      ['left', Math.max(...xs) - widthMm],
+      ['right', -Math.min(...xs)],
+      ['back', Math.max(...ys) - depthMm],
+      ['front', -Math.min(...ys)],
+    ] as const
+  ).filter(([, mm]) => mm > BEYOND_MM);
+  if (beyond.length === 0) return [];
+  const furthestMm = Math.max(...beyond.map(([, mm]) => mm));
+  return [{ code: 'beyond-place', edges: beyond.map(([edge]) => edge), furthestMm }];
 }
 
 /** Crossings of a ray to the right; a spot on the line counts as either. */
@@ -75,6 +100,10 @@ export function cushionWarningWords(warning: CushionWarning, style: LengthStyle)
       return warning.count === 1
         ? 'One button lies outside the outline.'
         : `${warning.count} buttons lie outside the outline.`;
+    case 'beyond-place': {
+      const where = warning.edges.map((edge) => `the ${edge}`).join(' and ');
+      return `The drawn outline goes ${show(warning.furthestMm)} beyond its place at ${where}.`;
+    }
     case 'closure-on-camera-side':
       return `The closure is in the ${warning.edge} edge, which the camera sees.`;
   }

@@ -4,6 +4,7 @@ import { boardLines } from './board-lines.ts';
 import { buttonsOf, rowsOverSeat } from './cushion-buttons.ts';
 import { cushionRunsOf, type CushionRun } from './cushion-runs.ts';
 import { CUSHION_SETTINGS, type CushionSettings } from './cushion-settings.ts';
+import { fittingSize } from './cushion-sizes.ts';
 import type { CushionDatum, CushionSpec, EdgeMeets } from './cushion-spec.ts';
 import { cushionWarnings } from './cushion-warnings.ts';
 import { madeOf } from './made-of.ts';
@@ -45,11 +46,7 @@ function cushionOf(
   const gap = gapsOf(meets, settings);
   const { depthMm, thicknessMm, foam } = placeOf(run);
   const placeMm = { widthMm: run.rightMm - run.leftMm, depthMm, thicknessMm };
-  const finishedMm = {
-    widthMm: Math.max(1, placeMm.widthMm - gap.left - gap.right),
-    depthMm: Math.max(1, placeMm.depthMm - gap.back - gap.front),
-    thicknessMm,
-  };
+  const finishedMm = fittingSize({ placeMm, gapsMm: gap });
   // The sitter's left is at the high end of the bench's x axis.
   const seams = { low: run.leftMm + gap.right, high: run.rightMm - gap.left };
   const datumX = datumOf(piece, ends);
@@ -105,7 +102,7 @@ function cushionOf(
     ...(choice.notes && { notes: choice.notes }),
   };
   const onJoints = piece.kind === 'bench' && piece.upholstery.buttons.alignTo === 'joints';
-  return { ...spec, warnings: cushionWarnings({ ...spec, onJoints }) };
+  return { ...spec, warnings: cushionWarnings({ ...spec, onJoints, drawn: Boolean(choice.shape?.drawn) }) };
 }
 
 function placeOf({ piece, kind }: CushionRun) {

@@ -1,5 +1,6 @@
 import type { CushionSpec } from '../cushions/cushion-spec.ts';
 import { buttonSpots } from '../cushions/cushion-warnings.ts';
+import { fittingSize } from '../cushions/cushion-sizes.ts';
 import { closurePath } from '../cushions/making/edge-strip.ts';
 import { wearHatch, wearRectangle } from '../cushions/wear-hatch.ts';
 import { wearMark } from '../cushions/wear.ts';
@@ -13,7 +14,7 @@ const BUTTON_RADIUS_MM = 11;
 
 /** A cushion from above, back edge up: board lines, seams, zip, wall, buttons, words and chains. */
 export function cushionPlan(spec: CushionSpec, labelMm: number): Drawing {
-  const { widthMm: w, depthMm: d } = spec.finishedMm;
+  const { widthMm: w, depthMm: d } = fittingSize(spec);
   const pageX = (fromSeam: number): number => (spec.datum.side === 'left' ? w - fromSeam : fromSeam);
   const shapes: DrawShape[] = [
     ...spec.boardLinesMm.map((line): DrawShape => ({
@@ -49,7 +50,7 @@ const onPage = (corners: readonly OutlineCorner[], depthMm: number): PagePoint[]
 
 /** What is to look used, hatched and numbered; a number stands where no edge is named. */
 function wearShapes(spec: CushionSpec, labelMm: number): DrawShape[] {
-  const d = spec.finishedMm.depthMm;
+  const d = fittingSize(spec).depthMm;
   return (spec.wear ?? []).flatMap((area, i): DrawShape[] => {
     const { x0, x1, y1 } = wearRectangle(spec, area);
     const lines = wearHatch(spec, area, labelMm / 4);
@@ -71,18 +72,19 @@ function wearShapes(spec: CushionSpec, labelMm: number): DrawShape[] {
 }
 
 /** The welt just within the edge, where the outline leaves room for it. */
-function seamShapes({ outline, finishedMm: { depthMm: d } }: CushionSpec): DrawShape[] {
-  const inner = offsetOutline(outline, -WELT_MM);
-  if (offsetFault(outline, inner)) return [];
-  return [{ kind: 'polygon', points: onPage(inner, d), pen: 'hair', fill: 'none' }];
+function seamShapes(spec: CushionSpec): DrawShape[] {
+  const inner = offsetOutline(spec.outline, -WELT_MM);
+  if (offsetFault(spec.outline, inner)) return [];
+  return [{ kind: 'polygon', points: onPage(inner, fittingSize(spec).depthMm), pen: 'hair', fill: 'none' }];
 }
 
 /** The closure along its edge and round both ends, with a tick and a word where it ends. */
 function closureShapes(spec: CushionSpec, labelMm: number): DrawShape[] {
-  const { making, make, outline, finishedMm } = spec;
+  const { making, make, outline } = spec;
+  const { widthMm, depthMm } = fittingSize(spec);
   if (!making || making.closure.edgeMm === 0) return [];
   const path = closurePath(outline, make.closureEdge, making.closure.wrapMm);
-  const page = path.map(([x, y]): PagePoint => [x, finishedMm.depthMm - y]);
+  const page = path.map(([x, y]): PagePoint => [x, depthMm - y]);
   const tick = labelMm / 5;
   const word = make.closure === 'zip' ? 'zip end' : 'closure end';
   const ends = [page.slice(0, 2), page.slice(-2).reverse()];
@@ -92,7 +94,7 @@ function closureShapes(spec: CushionSpec, labelMm: number): DrawShape[] {
       if (!end || !next || making.closure.wrapMm === 0) return [];
       const upright = Math.abs(next[0] - end[0]) < Math.abs(next[1] - end[1]);
       const across = upright ? [tick, 0] : [0, tick];
-      const inwards = upright && end[0] < finishedMm.widthMm / 2 ? 1 : -1;
+      const inwards = upright && end[0] < widthMm / 2 ? 1 : -1;
       return [
         {
           kind: 'polyline',
@@ -123,7 +125,7 @@ const isFar = ({ datum }: CushionSpec, labelMm: number): boolean => datum.toSeam
 
 function wallShapes(spec: CushionSpec, labelMm: number): DrawShape[] {
   const { datum } = spec;
-  const { widthMm: w, depthMm: d } = spec.finishedMm;
+  const { widthMm: w, depthMm: d } = fittingSize(spec);
   if (datum.meets === 'bench-end' || isFar(spec, labelMm)) return [];
   const x = datum.side === 'left' ? w + datum.toSeamMm : -datum.toSeamMm;
   const beside = datum.side === 'left' ? labelMm / 2 : -labelMm / 2;
@@ -147,27 +149,30 @@ function wallShapes(spec: CushionSpec, labelMm: number): DrawShape[] {
 }
 
 function planChains(spec: CushionSpec, labelMm: number): DrawShape[] {
-  const { widthMm: w, depthMm: d } = spec.finishedMm;
+  const { widthMm: w, depthMm: d } = fittingSize(spec);
   const fromLeft = spec.datum.side === 'left';
   const columns = spec.buttons.columns.map(({ fromSeamMm }) => fromSeamMm);
   const pageStops = [0, ...columns.map((c) => (fromLeft ? w - c : c)), w].sort((a, b) => a - b);
   const rows = [0, ...spec.buttons.rowsMm, d];
+  const xs = spec.outline.map(({ at }) => at[0]);
+  const ys = spec.outline.map(({ at }) => d - at[1]);
+  const [left, right, back, front] = [Math.min(...xs), Math.max(...xs), Math.min(...ys), Math.max(...ys)];
   const shapes: DrawShape[] = [
     {
       kind: 'dimension',
-      from: [0, d],
-      to: [w, d],
+      from: [left, front],
+      to: [right, front],
       offsetMm: -1.1 * labelMm,
-      valueMm: w,
+      valueMm: right - left,
       label: 'finished, seam to seam',
       labelLane: 0,
     },
     {
       kind: 'dimension',
-      from: [0, d],
-      to: [0, 0],
+      from: [left, front],
+      to: [left, back],
       offsetMm: (columns.length > 0 ? 2.4 : 1.2) * labelMm,
-      valueMm: d,
+      valueMm: front - back,
       labelLane: 0,
     },
   ];

@@ -118,7 +118,7 @@ export class CushionTuftingDto {
 
 /** Something to look at before a cushion is made; which numbers it has follows from its code. */
 export class CushionWarningDto {
-  @ApiProperty({ enum: ['off-joint', 'buttons-outside', 'closure-on-camera-side'] })
+  @ApiProperty({ enum: ['off-joint', 'buttons-outside', 'beyond-place', 'closure-on-camera-side'] })
   code: CushionSpec['warnings'][number]['code'];
   @ApiPropertyOptional()
   columns?: number;
@@ -128,4 +128,6 @@ export class CushionWarningDto {
   count?: number;
   @ApiPropertyOptional({ enum: CUSHION_EDGES })
   edge?: CushionEdge;
+  @ApiPropertyOptional({ enum: CUSHION_EDGES, isArray: true })
+  edges?: CushionEdge[];
 }

@@ -151,6 +151,8 @@ describe('other makes', () => {
     expect(extent(one.panel('top, front and bottom').finished)[1]).toBeCloseTo(roundTheSide, 6);
     expect(outlineArea(side)).toBeCloseTo(inch(20) * inch(4) + (Math.PI * inch(2) ** 2) / 2, 4);
     expect(one.panel('top, front and bottom').marksMm).toHaveLength(3);
+    // Welt goes round the half circle: two depths less the radius, the back and half a circle, twice.
+    expect(one.welt.alongSeamsMm).toBeCloseTo(2 * (2 * inch(20) + inch(4) + Math.PI * inch(2)), 6);
   });
 
   it('pulls the cover of a board round foam that stands over it, and staples it', () => {

@@ -123,18 +123,17 @@ function panelsOf(
       };
     }
     case 'waterfall':
-    case 'bullnose':
+    case 'bullnose': {
+      const wrapped = wrappedFront({ widthMm, depthMm, thicknessMm }, make.construction, seam);
       return {
         ...base,
         edgeHeightMm: thicknessMm,
         closure: { edgeMm: widthMm, wrapMm: 0, lengthMm: widthMm },
-        panels: [
-          ...wrappedFront({ widthMm, depthMm, thicknessMm }, make.construction, seam),
-          ...closurePanels(widthMm, thicknessMm, make, settings),
-        ],
+        panels: [wrapped.wrap, wrapped.side, ...closurePanels(widthMm, thicknessMm, make, settings)],
         // Both side panels, all round.
-        welt: weltOf(2, 2 * (depthMm + thicknessMm), make, settings),
+        welt: weltOf(2, outlinePerimeter(wrapped.side.finished), make, settings),
       };
+    }
   }
 }
 

@@ -10,7 +10,7 @@ import { rectangleOutline, rectanglePanel, type CutPanel } from './cut-panels.ts
  * @param size - finished
  * @param front - which of both
  * @param seamMm - seam allowance
- * @returns top, front and bottom in one, and two sides with the front at their left
+ * @returns top, front and bottom in one, and the side, of which two are cut, with the front at its left
  * @source back edge to back edge plus 1 in, width plus 1 in; side panels plus 1 in; bullnose sides end in a true half
  * circle: published upholstery course
  */
@@ -18,7 +18,7 @@ export function wrappedFront(
   { widthMm, depthMm, thicknessMm }: CushionSize,
   front: 'waterfall' | 'bullnose',
   seamMm: number,
-): CutPanel[] {
+): { wrap: CutPanel; side: CutPanel } {
   const radius = front === 'bullnose' ? thicknessMm / 2 : 0;
   const round = front === 'bullnose' ? Math.PI * radius : thicknessMm;
   const flat = depthMm - radius;
@@ -35,5 +35,5 @@ export function wrappedFront(
       ...corner,
       radiusMm: corner.at[0] < depthMm / 2 && radius > 0 ? radius + extra : 0,
     }));
-  return [wrap, { name: 'side', count: 2, finished: side(0), cut: side(seamMm), marksMm: [] }];
+  return { wrap, side: { name: 'side', count: 2, finished: side(0), cut: side(seamMm), marksMm: [] } };
 }
