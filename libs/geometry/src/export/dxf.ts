@@ -1,12 +1,4 @@
-import {
-  Colors,
-  DxfWriter,
-  LineTypes,
-  point3d,
-  TextHorizontalAlignment,
-  TextVerticalAlignment,
-  Units,
-} from '@tarikjabiri/dxf';
+import { Colors, LineTypes, point3d, TextHorizontalAlignment, TextVerticalAlignment } from '@tarikjabiri/dxf';
 import type { Layer } from '../drawing/drawn.ts';
 import type { PagePoint } from '../drawing/drawing.ts';
 import type { SetDrawing } from '../drawing/set-drawing.ts';
@@ -15,6 +7,7 @@ import { MM_PER_INCH } from '../units/length-style.ts';
 import { isCircle } from './arc-outline.ts';
 import { LAYERS } from './layers.ts';
 import { plainText } from './plain-text.ts';
+import { newDxf } from './new-dxf.ts';
 
 /** Names and pen colours of the layers; colour 7 is black on paper and white on a dark screen. */
 const LAYER_LOOKS: Record<Layer, { name: string; colour: number }> = {
@@ -46,9 +39,7 @@ export function dxfOf(drawing: SetDrawing, units: 'millimetres' | 'inches'): str
   const per = units === 'inches' ? MM_PER_INCH : 1;
   const size = (mm: number): number => mm / per;
   const at = ([x, y]: PagePoint) => point3d(size(x), size(-y), 0);
-  const dxf = new DxfWriter();
-  dxf.setUnits(units === 'inches' ? Units.Inches : Units.Millimeters);
-  dxf.setVariable('$MEASUREMENT', { 70: units === 'inches' ? 0 : 1 });
+  const dxf = newDxf(units);
   const { scale } = drawing.view;
   dxf.addLType(DASHED, '_ _ _', [size(1.6 * scale), -size(scale)]);
   for (const layer of LAYERS) {

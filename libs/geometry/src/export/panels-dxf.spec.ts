@@ -34,12 +34,11 @@ describe.each([
   ['millimetres', 1],
   ['inches', 25.4],
 ] as const)('panels for cutting in %s', (units, per) => {
-  const file = new Reader().parseSync(
-    panelsDxf(
-      panels.map((panel) => ({ title: `C1 ${panel.name}`, panel })),
-      units,
-    ),
-  )!;
+  const text = panelsDxf(
+    panels.map((panel) => ({ title: `C1 ${panel.name}`, panel })),
+    units,
+  );
+  const file = new Reader().parseSync(text)!;
   const closed = (layer: string) =>
     file.entities.filter((e): e is ILwpolylineEntity => e.type === 'LWPOLYLINE' && e.layer === layer);
 
@@ -56,6 +55,10 @@ describe.each([
         expect(entity.shape).toBe(true);
       });
     }
+  });
+
+  it('name who wrote the file, once', () => {
+    expect(text.match(/\$LASTSAVEDBY\s+1\s+(.*)/g)).toEqual([expect.stringContaining('Settlewright')]);
   });
 
   it('stand apart, with their words and marks', () => {

@@ -1,8 +1,9 @@
-import { DxfWriter, LineTypes, LWPolylineFlags, point2d, point3d, Units } from '@tarikjabiri/dxf';
+import { LineTypes, LWPolylineFlags, point2d, point3d } from '@tarikjabiri/dxf';
 import type { CutPanel } from '../cushions/making/cut-panels.ts';
 import { outlineExtent, outlineStretches, type OutlineCorner, type Point2 } from '../outlines/outline.ts';
 import { MM_PER_INCH } from '../units/length-style.ts';
 import { plainText } from './plain-text.ts';
+import { newDxf } from './new-dxf.ts';
 
 /** Layers of cut panels, from the knife to the words. */
 const LAYERS = { cut: 'CUT', seam: 'SEAMS', mark: 'MARKS', title: 'TITLE' } as const;
@@ -27,9 +28,7 @@ export interface TitledPanel {
  */
 export function panelsDxf(panels: readonly TitledPanel[], units: 'millimetres' | 'inches'): string {
   const per = units === 'inches' ? MM_PER_INCH : 1;
-  const dxf = new DxfWriter();
-  dxf.setUnits(units === 'inches' ? Units.Inches : Units.Millimeters);
-  dxf.setVariable('$MEASUREMENT', { 70: units === 'inches' ? 0 : 1 });
+  const dxf = newDxf(units);
   for (const name of Object.values(LAYERS)) dxf.addLayer(name, 7, LineTypes.Continuous);
   let right = 0;
   for (const { title, panel } of panels) {
