@@ -27,6 +27,7 @@ import type { SpecCushion, SpecPack } from './spec-pack';
 import { bareLength } from './spec-words';
 import { type Frame, frameOf } from './title-block';
 
+const WRAPPED: ReadonlySet<Construction> = new Set(['waterfall', 'bullnose']);
 const FOOT_MM = 44;
 const HEAD_MM = 12;
 const SUM_SIZE = 9.5;
@@ -225,7 +226,8 @@ function drawFoot(
       construction: spec.make.construction,
       thicknessMm: spec.finishedMm.thicknessMm,
       stripMm: spec.making?.edgeHeightMm ?? spec.finishedMm.thicknessMm,
-      welted: welt !== 'none',
+      // Of a front in one piece only the sides are welted, which this cut does not meet.
+      welted: welt !== 'none' && !WRAPPED.has(spec.make.construction),
       closureAt:
         closure !== 'stapled' && (closureEdge === 'front' || closureEdge === 'back') ? closureEdge : null,
       buttonPullMm: spec.buttons.count > 0 ? spec.tufting.pullMm : null,
