@@ -77,6 +77,8 @@ describe('test sits', () => {
     ['nobody', {}],
     ['two people at once', { castId: '00000000-0000-4000-8000-000000000000', name: 'The painter' }],
     ['a day to come', { name: 'The painter', weightKg: 80, satOn: '2199-01-01' }],
+    ['a drop beyond the thickness', { name: 'The painter', weightKg: 80, measuredMm: 110 }],
+    ['a drop ten times the estimate', { name: 'A child', weightKg: 10, measuredMm: 60 }],
     ['no drop', { name: 'The painter', weightKg: 80, measuredMm: 0 }],
     ['a weight in grams', { name: 'The painter', weightKg: 80_000 }],
   ])('refuse %s', async (_words, body) => {
@@ -97,6 +99,13 @@ describe('test sits', () => {
     await owner().delete(`${path()}/${body.id}`).expect(204);
     await owner().delete(`${path()}/${body.id}`).expect(404);
     expect(await list()).toEqual([]);
+    const entries = await test.dataSource.query(
+      'SELECT action, detail FROM audit_entries WHERE subject_id = $1 ORDER BY at',
+      [body.id],
+    );
+    expect(entries).toEqual(
+      ['test-sit.kept', 'test-sit.removed'].map((action) => ({ action, detail: null })),
+    );
   });
 
   it('are for owner and designer alone', async () => {

@@ -2,7 +2,8 @@ import { seatSinkMm } from '@settlewright/anthropometry';
 import { type FoamBuild, untestedSituation } from '@settlewright/geometry';
 import { Injectable } from '@nestjs/common';
 import { InjectRepository } from '@nestjs/typeorm';
-import type { Repository } from 'typeorm';
+import type { EntityManager, Repository } from 'typeorm';
+import { AuditService } from '../audit/audit.service';
 import { CastService } from '../cast/cast.service';
 import type { MemberInfo } from '../common/access.decorator';
 import type { Page, PageQuery } from '../common/page.dto';
@@ -12,12 +13,16 @@ import { SetAccess } from '../sets/set-access';
 import type { AddTestSitDto } from './test-sit.dto';
 import { TestSitRow } from './test-sit.entity';
 
+/** A set holds a factor between a tenth and ten: a drop further off the estimate than that was read or typed wrong. */
+const TIMES_OFF = 10;
+
 @Injectable()
 export class TestSitsService {
   constructor(
     @InjectRepository(TestSitRow) private readonly sits: Repository<TestSitRow>,
     private readonly access: SetAccess,
     private readonly cast: CastService,
+    private readonly audit: AuditService,
   ) {}
 
   async list(
@@ -60,21 +65,38 @@ export class TestSitsService {
       if (weightKg === null) throw invalid('weightKg', 'not-known', 'the weight is not in the cast: say it');
       const foam = untestedSituation(build);
       if (!foam) throw new RangeError('A hard seat has no drop.');
+      const predictedMm = seatSinkMm(foam, weightKg).sinkMm;
+      if (measuredMm > thicknessMm) {
+        throw invalid('measuredMm', 'beyond-thickness', 'a cushion goes down no further than it is thick');
+      }
+      if (measuredMm > TIMES_OFF * predictedMm || predictedMm > TIMES_OFF * measuredMm) {
+        const message = `more than ${TIMES_OFF} times off the estimate: see drop, weight and foam again`;
+        throw invalid('measuredMm', 'far-off-estimate', message);
+      }
       const { id } = await manager.save(
         manager.create(TestSitRow, {
           ...{ setId, castId, name, satOn, grade, ...build, weightKg, measuredMm, note },
-          predictedMm: seatSinkMm(foam, weightKg).sinkMm,
+          predictedMm,
           createdById: member.userId,
         }),
       );
+      await this.record(manager, member, 'test-sit.kept', id);
       return manager.findOneOrFail(TestSitRow, { where: { id }, relations: { cast: true } });
     });
   }
 
   async remove(member: MemberInfo, productionId: string, setId: string, sitId: string): Promise<void> {
     await this.access.forChanging(member, productionId, setId);
-    const { affected } = await this.sits.delete({ id: sitId, setId });
-    if (!affected) throw Problem.notFound('test sit');
+    await this.sits.manager.transaction(async (manager) => {
+      const { affected } = await manager.delete(TestSitRow, { id: sitId, setId });
+      if (!affected) throw Problem.notFound('test sit');
+      await this.record(manager, member, 'test-sit.removed', sitId);
+    });
+  }
+
+  private record(manager: EntityManager, member: MemberInfo, action: string, id: string): Promise<void> {
+    const { workshopId, userId } = member;
+    return this.audit.record(manager, { workshopId, userId, action, subjectType: 'test-sit', subjectId: id });
   }
 }
 

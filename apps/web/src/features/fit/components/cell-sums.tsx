@@ -98,12 +98,14 @@ export function Doubt({ outcome, cell, of }: { outcome: VerdictOutcome; cell: Fi
   const { drops = [], settleBySit } = outcome;
   const inHundred = (probability: number) => Math.round(probability * 100);
   const settling = outcome.settleWith.slice(0, 2);
+  const foamAlone = outcome.settleWith.length === 0 && drops.length > 0;
   return (
     <>
       <DropWords drops={drops} />
       {outcome.estimated && (
         <p className="mt-2 text-sm text-ink-2">
-          Predicted, not measured: {inHundred(outcome.probability.pass)} in 100 such{' '}
+          {foamAlone ? 'The foam is an estimate' : 'Predicted, not measured'}:{' '}
+          {inHundred(outcome.probability.pass)} in 100 such{' '}
           {drops.length > 0 ? 'people on such foam' : 'people'} fit,{' '}
           {inHundred(outcome.probability.insideFail)} in 100 are at least tight; a verdict asks for{' '}
           {inHundred(sheet.confidence)}.
