@@ -12,6 +12,7 @@ import {
   wearMark,
   wearPhrase,
   type CushionSpec,
+  type OrderCover,
 } from '@settlewright/geometry';
 import { Fragment, type ReactNode } from 'react';
 import { Measure } from '@/components/measure.tsx';
@@ -34,8 +35,22 @@ function Row({ name, children }: { name: string; children: ReactNode }) {
   );
 }
 
+interface CushionFactsProps {
+  spec: CushionSpec;
+  words: OrderSpec;
+  /** Cloths of the order. */
+  covers: readonly OrderCover[];
+}
+
+/** Names of the cloths that cover it, and what was written of the cover. */
+function Cover({ spec, words, covers }: CushionFactsProps) {
+  const cloths = covers.filter(({ cushionMarks }) => cushionMarks?.includes(spec.mark) ?? true);
+  const said = [...cloths.map(({ name }) => name), words.cover].filter(Boolean);
+  return said.length > 0 && <Row name="Cover">{said.join('; ')}</Row>;
+}
+
 /** What follows from the finished size of a cushion, and what its maker is told. */
-export function CushionFacts({ spec, words }: { spec: CushionSpec; words: OrderSpec }) {
+export function CushionFacts({ spec, words, covers }: CushionFactsProps) {
   const format = useFormat();
   const { making, make, foam, buttons } = spec;
   const sawn = making && outlineExtent(making.foam.outline);
@@ -74,7 +89,7 @@ export function CushionFacts({ spec, words }: { spec: CushionSpec; words: OrderS
           })}
         </Row>
       )}
-      {words.cover !== '' && <Row name="Cover">{words.cover}</Row>}
+      <Cover spec={spec} words={words} covers={covers} />
       {making && making.welt.lengthMm > 0 && (
         <Row name="Welt">
           {show(making.welt.lengthMm)} ({runText(making.welt.lengthMm, format.style)}) for {making.welt.seams}{' '}

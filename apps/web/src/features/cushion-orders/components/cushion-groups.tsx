@@ -6,6 +6,7 @@ import {
   thicknessWords,
   type CushionGroup,
   type CushionSpec,
+  type OrderCover,
 } from '@settlewright/geometry';
 import { useMemo } from 'react';
 import { MarkTag } from '@/components/mark-tag.tsx';
@@ -40,10 +41,16 @@ const NUMBER_OF_WIDTH = 0.1;
 
 interface GroupsProps {
   words: OrderSpec;
+  covers: readonly OrderCover[];
   toleranceMm?: number;
 }
 
-function Group({ group, words, toleranceMm = USUAL_TOLERANCE_MM }: GroupsProps & { group: CushionGroup }) {
+function Group({
+  group,
+  words,
+  covers,
+  toleranceMm = USUAL_TOLERANCE_MM,
+}: GroupsProps & { group: CushionGroup }) {
   const { spec, marks, mirroredMarks } = group;
   const { style } = useFormat();
   const { widthMm, depthMm } = spec.finishedMm;
@@ -98,7 +105,7 @@ function Group({ group, words, toleranceMm = USUAL_TOLERANCE_MM }: GroupsProps &
           </p>
           <CushionDrawing drawing={drawing.section} label={`${first}, section`} leastPx={300} mostPx={420} />
         </div>
-        <CushionFacts spec={spec} words={words} />
+        <CushionFacts spec={spec} words={words} covers={covers} />
       </div>
     </section>
   );

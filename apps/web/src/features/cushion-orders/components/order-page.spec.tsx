@@ -90,9 +90,10 @@ describe('OrderPage', () => {
   it('says of each cushion what the camera sees, what holds it and what its maker is told', async () => {
     const [first, ...rest] = ORDER.cushions;
     const told = { cameraSides: ['front' as const], holdDown: 'snaps' as const, notes: 'Pile to the front.' };
-    show({ ...ORDER, cushions: [{ ...first!, ...told }, ...rest] });
+    show({ ...ORDER, covers: [plainCover('green cord')], cushions: [{ ...first!, ...told }, ...rest] });
     const cushion = within(await screen.findByRole('region', { name: 'Cushions C1' }));
     const said = (name: string) => cushion.getByText(name, { selector: 'dt' }).nextElementSibling;
+    expect(said('Cover')).toHaveTextContent('green cord; Plum moquette');
     expect(said('Camera')).toHaveTextContent('sees the front');
     expect(said('Hold-down')).toHaveTextContent('snaps, studs on the wood');
     expect(said('Notes')).toHaveTextContent('Pile to the front.');

@@ -103,7 +103,12 @@ function Opened({ path, order }: { path: OrderPath; order: Order }) {
       </div>
       <div className="grid gap-10 desk:grid-cols-[minmax(0,1fr)_20rem]">
         <div className="min-w-0">
-          <CushionGroups cushions={order.cushions} words={order.spec} toleranceMm={order.toleranceMm} />
+          <CushionGroups
+            cushions={order.cushions}
+            words={order.spec}
+            covers={order.covers}
+            toleranceMm={order.toleranceMm}
+          />
           {marks.length > 0 && (
             <Suspense fallback={<PaleBars words="Working out the cloth" rows={3} />}>
               <ClothsSection path={path} order={order} />

@@ -70,7 +70,12 @@ function Opened({ token, order }: { token: string; order: PublicOrder }) {
           <ToCorrespondence words="To papers, questions and price" />
         </p>
         {life.data && <Changes life={life.data} revisionLetter={order.revisionLetter} />}
-        <CushionGroups cushions={order.cushions} words={order.spec} toleranceMm={life.data?.toleranceMm} />
+        <CushionGroups
+          cushions={order.cushions}
+          words={order.spec}
+          covers={order.covers}
+          toleranceMm={life.data?.toleranceMm}
+        />
         <ClothWords covers={order.covers} />
         {order.spec.notes !== '' && <p className="mb-3 max-w-text whitespace-pre-line">{order.spec.notes}</p>}
         {order.spec.flammability !== '' && (
