@@ -74,7 +74,7 @@ it('puts a kept arrangement into the set as one step, with free marks', async ()
   expect(onClose).toHaveBeenCalled();
 });
 
-it('takes one off the list, and says where the first comes from', async () => {
+it('takes one off the list at the second press, and says where the first comes from', async () => {
   let items = [kept];
   server.use(
     http.get(ROUTE, () => HttpResponse.json({ items, total: items.length, page: 1, pageSize: 200 })),
@@ -84,6 +84,14 @@ it('takes one off the list, and says where the first comes from', async () => {
     }),
   );
   const { user } = open(<PutArrangement onChoose={vi.fn()} onClose={vi.fn()} />);
-  await user.click(await screen.findByRole('button', { name: 'Take Booth of four off the list' }));
+  await user.click(
+    await screen.findByRole('button', { name: 'Take Booth of four off the list, asks first' }),
+  );
+  const again = () => screen.getByRole('button', { name: 'Take it off for the whole workshop' });
+  expect(again()).toHaveFocus();
+  await user.tab();
+  await user.click(screen.getByRole('button', { name: /asks first$/ }));
+  expect(items).toEqual([kept]);
+  await user.click(again());
   expect(await screen.findByText(/None is kept yet/)).toBeInTheDocument();
 });

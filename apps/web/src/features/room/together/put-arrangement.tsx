@@ -1,10 +1,11 @@
 import { planOf } from '@settlewright/geometry';
-import { useMemo } from 'react';
+import { useMemo, useState } from 'react';
 import { Button } from '@/components/button.tsx';
 import { Dialog } from '@/components/dialog.tsx';
 import { commonScale, DrawingSvg } from '@/components/drawing-svg.tsx';
 import { LoadingLine } from '@/components/loading.tsx';
 import { Notice } from '@/components/notice.tsx';
+import { announce } from '@/lib/announce.ts';
 import { useArrangements, useRemoveArrangement } from '@/lib/arrangements.ts';
 import { usePutIn } from '../clipboard/use-put-in.ts';
 import { useSurroundings } from '../room-context.tsx';
@@ -73,19 +74,42 @@ export default function PutArrangement({ onChoose, onClose }: Props) {
               >
                 Put it in
               </Button>
-              <Button
-                look="word"
-                aria-label={`Take ${arrangement.name} off the list`}
+              <TakeOff
+                name={arrangement.name}
                 busy={remove.isPending && remove.variables === arrangement.id}
-                onClick={() => remove.mutate(arrangement.id)}
-              >
-                Take off the list
-              </Button>
+                onTake={() => remove.mutate(arrangement.id)}
+              />
             </div>
           </li>
         ))}
       </ul>
     </Dialog>
+  );
+}
+
+interface TakeOffProps {
+  name: string;
+  busy: boolean;
+  onTake: () => void;
+}
+
+/** Takes an arrangement off the list at the second press: it cannot be undone, and is gone for every member. */
+function TakeOff({ name, busy, onTake }: TakeOffProps) {
+  const [asked, setAsked] = useState(false);
+  return (
+    <Button
+      look="word"
+      aria-label={asked ? undefined : `Take ${name} off the list, asks first`}
+      busy={busy}
+      onBlur={() => setAsked(false)}
+      onClick={() => {
+        if (asked) return onTake();
+        setAsked(true);
+        announce(`Press again to take ${name} off for the whole workshop. Sets that hold it keep it.`);
+      }}
+    >
+      {asked ? 'Take it off for the whole workshop' : 'Take off the list'}
+    </Button>
   );
 }
 
