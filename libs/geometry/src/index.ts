@@ -35,13 +35,14 @@ export { LEAF_WORDS, leavesOfTable, withLeaf, type LeafEdge, type TableLeaf } fr
 export * from './pieces/place-frames.ts';
 export * from './pieces/bench-layout.ts';
 export {
+  cushionHeightMm,
   foamBuild,
   foamSituation,
   testedOf,
   untestedSituation,
   type FoamBuild,
 } from './pieces/foam-situation.ts';
-export { pressedSeatHeightMm, referenceSinkMm } from './pieces/seat-sink.ts';
+export { pressedSeatHeightMm, referenceSinkMm, unpressedSeatTopMm } from './pieces/seat-sink.ts';
 export * from './situation/measure-set.ts';
 export * from './situation/suggest-fixes.ts';
 export * from './situation/room-for.ts';
@@ -87,6 +88,7 @@ export { cushionKey, cushionKeyParts } from './cushions/cushion-key.ts';
 export * from './cushions/choice-words.ts';
 export type { CushionWarning } from './cushions/cushion-warning.ts';
 export * from './cushions/cushion-warnings.ts';
+export { buildPhrase } from './cushions/build-phrase.ts';
 export { foamOfCushion } from './cushions/foam-of-cushion.ts';
 export { plainMake } from './cushions/made-of.ts';
 export type { RunJoints } from './cushions/run-joints.ts';

@@ -6,10 +6,27 @@ const mm = (min: number, max: number) => fc.double({ min, max, noNaN: true, noDe
 
 const at = fc.record({ xMm: mm(-8000, 8000), zMm: mm(-8000, 8000), turnDeg: mm(-180, 180) });
 
+type SeatCushion = PieceOf<'bench'>['seatCushion'];
+
 const end = fc.record({
   kind: fc.constantFrom('open', 'arm', 'wall'),
   thicknessMm: mm(0, 80),
   heightMm: mm(0, 900),
+});
+
+/** Of a cushion of no thickness it changes nothing. */
+const anyWrap = fc.option(
+  mm(2, 60).map((thicknessMm) => ({ thicknessMm, lostMm: thicknessMm / 2 })),
+  { nil: undefined },
+);
+
+const wrapped = (
+  cushion: SeatCushion,
+  thicknessMm: number,
+  wrap: SeatCushion['foam']['wrap'],
+): SeatCushion => ({
+  thicknessMm,
+  foam: { ...cushion.foam, ...(wrap && { wrap }) },
 });
 
 /** Benches over nearly the whole range of every parameter. */
@@ -30,18 +47,20 @@ export const anyBench: fc.Arbitrary<PieceOf<'bench'>> = fc
     lipMm: mm(0, 150),
     ends: fc.record({ left: end, right: end }),
     boards: fc.record({ faceMm: mm(60, 300), revealMm: mm(0, 12) }),
+    seatWrap: anyWrap,
+    backWrap: anyWrap,
     longestCushionMm: mm(400, 3000),
     lumbar: fc.option(fc.record({ apexMm: mm(0, 400), recessMm: mm(0, 150) }), { nil: undefined }),
   })
-  .map(({ seatPad, backPad, longestCushionMm, at: where, ...sizes }) => {
+  .map(({ seatPad, backPad, seatWrap, backWrap, longestCushionMm, at: where, ...sizes }) => {
     const start = newPiece('bench', 'b1', 'B1', where);
     return {
       ...start,
       ...sizes,
       ends: sizes.ends,
       base: sizes.base,
-      seatCushion: { ...start.seatCushion, thicknessMm: seatPad },
-      backCushion: { ...start.backCushion, thicknessMm: backPad },
+      seatCushion: wrapped(start.seatCushion, seatPad, seatWrap),
+      backCushion: wrapped(start.backCushion, backPad, backWrap),
       upholstery: { ...start.upholstery, longestCushionMm },
     };
   });
@@ -112,13 +131,14 @@ const anySeat: fc.Arbitrary<PieceOf<'loose-seat'>> = fc
     seatDepthMm: mm(200, 800),
     deckHeightMm: mm(200, 900),
     pad: fc.oneof(fc.constant(0), mm(5, 150)),
+    wrap: anyWrap,
     backHeightMm: fc.oneof(fc.constant(0), mm(100, 1000)),
     backLeanDeg: mm(0, 30),
     armHeightMm: fc.oneof(fc.constant(0), mm(50, 400)),
   })
-  .map(({ at: where, pad, ...sizes }) => {
+  .map(({ at: where, pad, wrap, ...sizes }) => {
     const start = newPiece('loose-seat', 'l1', 'L1', where);
-    return { ...start, ...sizes, seatCushion: { ...start.seatCushion, thicknessMm: pad } };
+    return { ...start, ...sizes, seatCushion: wrapped(start.seatCushion, pad, wrap) };
   });
 
 /** Any piece that is made of more than one part. */

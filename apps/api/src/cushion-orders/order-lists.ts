@@ -1,4 +1,5 @@
 import {
+  buildPhrase,
   CLOSURE_WORDS,
   CONSTRUCTION_WORDS,
   type CutPanel,
@@ -12,6 +13,7 @@ import {
   orderDrop,
   type OrderSitter,
   outlineExtent,
+  phraseText,
   type ScheduleRow,
   shownDropMm,
   TUFTING_WORDS,
@@ -89,6 +91,11 @@ function foamColumns(system: LengthStyle['system']): ReturnType<typeof columnsOf
     {
       head: `foam 25 % IFD ${foamUnit('firmness', style)}`,
       of: ({ spec }) => plain('firmness', spec.foam.ifd25N),
+    },
+    {
+      head: 'foam layers and wrap',
+      of: ({ spec: { foam, finishedMm } }) =>
+        phraseText(buildPhrase(foam, finishedMm.thicknessMm), { system, roundTo: 16 }).replace(/\s/g, ' '),
     },
   ];
 }

@@ -73,7 +73,6 @@ function specCushion(row: ScheduleRow, model: OrderModel, assumedCloths: readonl
     hand: handednessOf(spec),
     finished: spec.finishedMm,
     make: makeWords(make, spec.kind),
-    foamGrade: { ...spec.foam, name: spec.foam.grade },
     ...(spec.curve && { curve: spec.curve }),
     panels: row.panels,
     ...(board && { board }),

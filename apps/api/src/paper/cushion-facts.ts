@@ -130,7 +130,7 @@ function factsOf(cushion: SpecCushion, pack: SpecPack): Fact[] {
       'Foam',
       [
         row.sawnMm && `${sizeWords(row.sawnMm, units)}, `,
-        foamWords(cushion, units),
+        foamWords(spec.foam, spec.finishedMm.thicknessMm, units),
         row.foam && `; ${volumeWords(row.foam.volumeM3, units)}, ${massWords(row.foam.massKg, units)} each`,
       ]
         .filter(Boolean)

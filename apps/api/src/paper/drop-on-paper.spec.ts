@@ -61,6 +61,7 @@ describe('how far a seat goes down, on paper', () => {
         (['light', 'heavy'] as const).map((sitter) => shown(inTheRoom(document, spec.benchId, sitter))),
       ),
     );
+    expect(text).toMatch(/from the top 1″ of 22.lb on 3″ of 58.lb; ½″ of wrap over it, both faces together/);
     expect(text).toContain('(by 2 test sits, give or take 13 %)');
     expect(text).toContain('(estimate, give or take 30 %, from memory)');
   });

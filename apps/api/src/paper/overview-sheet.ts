@@ -153,7 +153,7 @@ function orderFacts(pack: SpecPack): Fact[] {
   const show = (mm: number) => formatLength(mm, { ...units, feet: false });
   const foams = totals.foam.map(
     ({ foam, thicknessMm, marks, massKg, volumeM3 }) =>
-      `${marksWords(marks)}: ${foamWords({ foamGrade: { ...foam, name: foam.grade } }, units)}, ${show(thicknessMm)} thick, ` +
+      `${marksWords(marks)}: ${foamWords(foam, thicknessMm, units)}, ${show(thicknessMm)} thick, ` +
       `${volumeWords(volumeM3, units)}, ${massWords(massKg, units)}`,
   );
   const zips = totals.zips.map(({ lengthMm, count }) => `${count} × ${show(lengthMm)}`).join(', ');

@@ -56,7 +56,6 @@ export interface SpecCushion {
   /** As sat in. */
   hand: Handedness;
   finished: Size;
-  foamGrade: { name: string; densityKgM3: number; ifd25N: number; supportFactor: number };
   /** Of a back cushion on a curved back: apex over the pressed seat, and how far it gives way below. */
   curve?: { apexMm: number; recessMm: number };
   /** Construction, closure and welt in words. */

@@ -1,5 +1,12 @@
-import { formatLength, formatMass, type LengthStyle } from '@settlewright/geometry';
-import type { Size, SpecCushion } from './spec-pack';
+import {
+  buildPhrase,
+  type Foam,
+  formatLength,
+  formatMass,
+  type LengthStyle,
+  phraseText,
+} from '@settlewright/geometry';
+import type { Size } from './spec-pack';
 
 const KG_M3_PER_LB_FT3 = 16.018463;
 const NEWTON_PER_LBF = 4.4482216;
@@ -35,16 +42,17 @@ export function runWords(mm: number, units: LengthStyle): string {
   return `${formatLength(mm, { ...units, feet: false })} (${formatLength(mm, { ...units, feet: true })})`;
 }
 
-/** Grade with density and firmness: neither is said without the other. */
-export function foamWords({ foamGrade }: Pick<SpecCushion, 'foamGrade'>, units: LengthStyle): string {
-  const { name, densityKgM3, ifd25N } = foamGrade;
+/** Grade with density and firmness, neither without the other, and of what it is built up. */
+export function foamWords(foam: Foam, thicknessMm: number, units: LengthStyle): string {
+  const { grade, densityKgM3, ifd25N } = foam;
   const density = isMetric(units)
     ? `${Math.round(densityKgM3)}\u00a0kg/m³`
     : `${(densityKgM3 / KG_M3_PER_LB_FT3).toFixed(1)}\u00a0lb/ft³`;
   const firmness = isMetric(units)
     ? `firmness ${Math.round(ifd25N)}\u00a0N (25\u00a0% IFD)`
     : `firmness ${Math.round(ifd25N / NEWTON_PER_LBF)}\u00a0lb (25\u00a0% IFD)`;
-  return [name, density, firmness].filter(Boolean).join(', ');
+  const built = phraseText(buildPhrase(foam, thicknessMm), units);
+  return [[grade, density, firmness].filter(Boolean).join(', '), built].filter(Boolean).join('; ');
 }
 
 export function volumeWords(m3: number, units: LengthStyle): string {

@@ -32,6 +32,7 @@ export interface FoamWrap {
 
 /** Foam under the sitter, as its maker states it. */
 export interface FoamSituation {
+  /** Before anybody sits, the wrap included. */
   thicknessMm: number;
   /** 25 % indentation force deflection, newtons on the 323 cm² foot (ASTM D3574). */
   ifd25N: number;
@@ -39,7 +40,7 @@ export interface FoamSituation {
   supportFactor: number;
   /** From the top down, where it is made of several; then `ifd25N` is that of the whole and is not read. */
   layers?: readonly FoamLayer[] | undefined;
-  /** Soft wrap inside the cushion's thickness; absent where there is none. */
+  /** Soft wrap, counted in the thickness; absent where there is none. */
   wrap?: FoamWrap | undefined;
   /** From test sits on it; absent where nobody tried it. */
   tested?: SinkCalibration | undefined;

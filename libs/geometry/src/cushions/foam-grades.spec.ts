@@ -45,8 +45,8 @@ describe('a foam as a piece has it', () => {
     ]);
   });
 
-  it('loses half of its wrap inside the thickness of the cushion', () => {
-    expect(dropIn(grade({ wrapMm: 25.4 }), 200, 127)).toBeCloseTo(1.61 + 0.5, 2);
+  it('loses half of its wrap, and what the foam in its full thickness does', () => {
+    expect(dropIn(grade({ wrapMm: 25.4 }), 200)).toBeCloseTo(1.61 + 0.5, 2);
     expect(foamOfGrade(grade({ wrapMm: 20 }), 6.35).wrap).toEqual({ thicknessMm: 20, lostMm: 5 });
   });
 });

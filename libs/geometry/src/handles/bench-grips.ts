@@ -1,4 +1,5 @@
 import { benchLayout } from '../pieces/bench-layout.ts';
+import { cushionHeightMm } from '../pieces/foam-situation.ts';
 import type { PieceOf } from '../room/document.ts';
 import type { Grip } from './handle.ts';
 
@@ -16,8 +17,8 @@ export function benchGrips(bench: PieceOf<'bench'>): Grip[] {
   const layout = benchLayout(bench);
   const { backTopMm, faceZMm, frontZMm, seatTopFrontMm, seatTopRearMm, leanRad, hasBack } = layout;
   const half = bench.lengthMm / 2;
-  const seat = bench.seatCushion.thicknessMm;
-  const pad = bench.backCushion.thicknessMm;
+  const seat = cushionHeightMm(bench.seatCushion);
+  const pad = cushionHeightMm(bench.backCushion);
   const middle = seatTopFrontMm - seat / 2;
   const [sin, cos] = [Math.sin(leanRad), Math.cos(leanRad)];
   const grips: Grip[] = [

@@ -1,4 +1,5 @@
 import type { Vec3 } from '../parts/part.ts';
+import { cushionHeightMm } from '../pieces/foam-situation.ts';
 import { pressedSeatHeightMm } from '../pieces/seat-sink.ts';
 import type { Piece, PieceOf } from '../room/document.ts';
 import { radians } from '../units/angle.ts';
@@ -89,7 +90,7 @@ function ofLooseSeat(seat: PieceOf<'loose-seat'>): Grip[] {
   const x = seat.widthMm / 2;
   const z = seat.seatDepthMm;
   const { deckHeightMm: deck } = seat;
-  const cushion = seat.seatCushion.thicknessMm;
+  const cushion = cushionHeightMm(seat.seatCushion);
   const top = deck + cushion;
   const pressed = pressedSeatHeightMm(seat);
   const lean = radians(seat.backLeanDeg);

@@ -1,6 +1,7 @@
 import { boardRun, snapToBoards } from '../parts/boards.ts';
 import { toPiece } from '../parts/placement.ts';
 import { benchLayout } from '../pieces/bench-layout.ts';
+import { unpressedSeatTopMm } from '../pieces/seat-sink.ts';
 import { pieceEnvelope } from '../pieces/kinds.ts';
 import { footprint } from '../room/footprint.ts';
 import type { Piece, PieceOf, SetDocument } from '../room/document.ts';
@@ -50,7 +51,7 @@ function heightLines(piece: Piece, handle: Handle): SnapLine[] {
   if (piece.kind === 'bench') {
     lines.push(at(benchLayout(piece).seatTopFrontMm, `seat of ${piece.mark}`));
   } else if (piece.kind === 'loose-seat') {
-    lines.push(at(piece.deckHeightMm + piece.seatCushion.thicknessMm, `seat of ${piece.mark}`));
+    lines.push(at(unpressedSeatTopMm(piece), `seat of ${piece.mark}`));
   } else if (piece.kind === 'table') {
     lines.push(at(piece.heightMm - piece.topThicknessMm, `underside of ${piece.mark}`));
   } else if (piece.kind === 'sill') {

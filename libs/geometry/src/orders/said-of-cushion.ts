@@ -1,4 +1,5 @@
 import { HOLD_DOWN_WORDS } from '../cushions/cushion-choice.ts';
+import { buildPhrase } from '../cushions/build-phrase.ts';
 import { edgeWords, makeWords } from '../cushions/choice-words.ts';
 import type { CushionSpec } from '../cushions/cushion-spec.ts';
 import { FULLNESS_RULES } from '../cushions/tufting.ts';
@@ -56,7 +57,13 @@ export function saidOfCushion(spec: CushionSpec): Record<SaidOfCushion, Phrase> 
           '; ',
         )
       : [],
-    'foam-grade': phrase`${foam.grade}, ${{ densityKgM3: foam.densityKgM3 }}, ${{ firmnessN: foam.ifd25N }} (25 % IFD)`,
+    'foam-grade': joined(
+      [
+        phrase`${foam.grade}, ${{ densityKgM3: foam.densityKgM3 }}, ${{ firmnessN: foam.ifd25N }} (25 % IFD)`,
+        buildPhrase(foam, finishedMm.thicknessMm),
+      ],
+      '; ',
+    ),
     hand: phrase`${spec.hand}`,
     tufting: tuftingPhrase(spec),
     'button-count': phrase`${String(buttons.count)}`,

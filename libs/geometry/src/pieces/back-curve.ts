@@ -1,5 +1,6 @@
 import type { PieceOf } from '../room/document.ts';
 import { benchLayout } from './bench-layout.ts';
+import { cushionHeightMm } from './foam-situation.ts';
 
 /** Without an apex the back comes forward again up to here over the pressed seat, millimetres. */
 const FLAT_AGAIN_MM = 300;
@@ -51,7 +52,7 @@ export function curvedPad(
   flat: readonly [Corner, Corner, Corner, Corner],
 ): Corner[] | undefined {
   const [lowRear, lowFront, highFront, highRear] = flat;
-  const thickness = bench.backCushion.thicknessMm;
+  const thickness = cushionHeightMm(bench.backCushion);
   const cos = Math.cos(benchLayout(bench).leanRad);
   const deepest = (thickness - LEAST_PAD_MM) / cos;
   const curve = backCurve(bench);

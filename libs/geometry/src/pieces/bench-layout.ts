@@ -1,6 +1,7 @@
 import type { PieceOf } from '../room/document.ts';
 import { radians } from '../units/angle.ts';
-import { pressedSeatHeightMm } from './seat-sink.ts';
+import { cushionHeightMm } from './foam-situation.ts';
+import { pressedSeatHeightMm, unpressedSeatTopMm } from './seat-sink.ts';
 
 /** Thickness of the deck panel and of the other panels of a bench base, millimetres. */
 export const PANEL_MM = 18;
@@ -58,17 +59,18 @@ export function benchLayout(bench: PieceOf<'bench'>): BenchLayout {
   const tilt = Math.tan(tiltRad);
   const lean = Math.tan(leanRad);
   const pressedTopMm = pressedSeatHeightMm(bench);
-  const seatTopFrontMm = bench.deckHeightMm + bench.seatCushion.thicknessMm;
+  const seatTopFrontMm = unpressedSeatTopMm(bench);
+  const cushionMm = cushionHeightMm(bench.seatCushion);
   const seatTopRearMm = seatTopFrontMm - bench.seatDepthMm * tilt;
   const backTopMm = pressedTopMm + bench.backHeightMm;
   const faceZMm = hasBack
     ? bench.backThicknessMm +
       Math.max(0, backTopMm - seatTopRearMm) * lean +
-      bench.backCushion.thicknessMm / Math.cos(leanRad)
+      cushionHeightMm(bench.backCushion) / Math.cos(leanRad)
     : 0;
   const frontZMm = faceZMm + bench.seatDepthMm;
-  const deckFrontYMm = seatTopFrontMm - bench.seatCushion.thicknessMm * Math.cos(tiltRad);
-  const deckFrontZMm = frontZMm + bench.seatCushion.thicknessMm * Math.sin(tiltRad);
+  const deckFrontYMm = seatTopFrontMm - cushionMm * Math.cos(tiltRad);
+  const deckFrontZMm = frontZMm + cushionMm * Math.sin(tiltRad);
   const rearPanelMm = hasBack ? Math.min(6, bench.backThicknessMm * 0.2) : 0;
   const riserFrontZMm = frontZMm - bench.lipMm;
   const hasKick = bench.base === 'box' && bench.kick.depthMm > 0 && bench.kick.heightMm > 0;

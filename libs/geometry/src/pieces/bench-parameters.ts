@@ -2,7 +2,7 @@ import type { PieceOf } from '../room/document.ts';
 import { endParameters, endsMm, THINNEST_INNER_MM } from './bench-end-parameters.ts';
 import { hasBack, PADDING_PARAMETERS } from './bench-padding-parameters.ts';
 import type { ParameterSpec } from './kind.ts';
-import { pressedSeatHeightMm, referenceSinkMm, withPressedSeatHeight } from './seat-sink.ts';
+import { pressedRiseMm, pressedSeatHeightMm, withPressedSeatHeight } from './seat-sink.ts';
 
 type Bench = PieceOf<'bench'>;
 type BenchParameter = ParameterSpec<'bench'>;
@@ -41,7 +41,7 @@ export const BENCH_PARAMETERS: readonly BenchParameter[] = [
     read: pressedSeatHeightMm,
     write: (bench, value) => withPressedSeatHeight(bench, Number(value)),
     limits: (bench) => {
-      const rise = bench.seatCushion.thicknessMm - referenceSinkMm(bench);
+      const rise = pressedRiseMm(bench);
       return { min: 100 + rise, max: 1000 + rise };
     },
   },

@@ -6,6 +6,7 @@ import { positionsAlong } from '../parts/spacing.ts';
 import type { PieceOf, SetDocument } from '../room/document.ts';
 import { benchBaseParts } from './bench-base.ts';
 import { curvedPad } from './back-curve.ts';
+import { cushionHeightMm } from './foam-situation.ts';
 import { benchLayout, PANEL_MM, type BenchLayout } from './bench-layout.ts';
 import { addCushion } from './cushion-part.ts';
 
@@ -52,8 +53,8 @@ function back(list: PartList, bench: PieceOf<'bench'>, layout: BenchLayout): voi
   const cushionRearZ =
     layout.faceZMm -
     Math.min(
-      bench.seatCushion.thicknessMm * Math.max(0, -Math.sin(layout.tiltRad)),
-      bench.backCushion.thicknessMm / cos,
+      cushionHeightMm(bench.seatCushion) * Math.max(0, -Math.sin(layout.tiltRad)),
+      cushionHeightMm(bench.backCushion) / cos,
     );
   const downToCushion = sin > 1e-9 ? (cushionRearZ - faceTopZ) / sin : Infinity;
   const boardLength = Math.min(
@@ -103,8 +104,8 @@ function cushions(
   choices: NonNullable<SetDocument['cushions']>,
 ): void {
   const { tiltRad, leanRad, faceZMm } = layout;
-  const seat = bench.seatCushion.thicknessMm;
-  const pad = bench.backCushion.thicknessMm;
+  const seat = cushionHeightMm(bench.seatCushion);
+  const pad = cushionHeightMm(bench.backCushion);
   const [sinLean, cosLean] = [Math.sin(leanRad), Math.cos(leanRad)];
   // Tilted forward, the lower rear edge of a seat cushion leans back; without a pad it is cut short there.
   const cutMm = Math.max(0, -seat * Math.sin(tiltRad) - (layout.hasBack ? pad / cosLean : 0));

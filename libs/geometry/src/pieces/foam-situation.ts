@@ -7,6 +7,20 @@ export interface FoamCushion {
   foam: Foam;
 }
 
+/**
+ * How high a cushion stands in its middle before anybody sits or leans on it. Its thickness is that of the boxing, with
+ * foam cut as thick; a wrap stands over it as crown.
+ *
+ * @param cushion - thickness in millimetres and foam
+ * @returns millimetres; 0 for a hard seat
+ * @source foam as thick as its boxing is high, a wrap adds the crown: a cushion maker's pages (read in the source)
+ */
+export const cushionHeightMm = ({ thicknessMm, foam }: FoamCushion): number =>
+  builtHeightMm(foamBuild({ thicknessMm, foam }));
+
+const builtHeightMm = ({ thicknessMm, wrap }: FoamBuild): number =>
+  thicknessMm > 0 ? thicknessMm + (wrap?.thicknessMm ?? 0) : 0;
+
 /** What a cushion goes down by: how thick, how firm, of which layers and in which wrap. */
 export type FoamBuild = Pick<FoamCushion, 'thicknessMm'> &
   Pick<Foam, 'ifd25N' | 'supportFactor' | 'layers' | 'wrap'>;
@@ -61,19 +75,23 @@ export function testedOf(cushion: FoamCushion): Foam['tested'] {
  * A build-up as the estimate of its drop reads it, as if nobody had tried it.
  *
  * @param build - thickness in millimetres, firmness, layers and wrap
- * @returns thickness in millimetres, 25 % IFD in newtons, layers and wrap as shares; `undefined` for a hard seat
+ * @returns thickness in millimetres with the wrap, 25 % IFD in newtons, layers and wrap as shares; `undefined` for a hard
+ *   seat
  */
 export function untestedSituation(build: FoamBuild): FoamSituation | undefined {
-  const { thicknessMm, ifd25N, supportFactor, layers, wrap } = build;
-  if (thicknessMm <= 0) return undefined;
+  const { ifd25N, supportFactor, layers, wrap } = build;
+  const thicknessMm = builtHeightMm(build);
+  if (thicknessMm === 0) return undefined;
   const situation: FoamSituation = { thicknessMm, ifd25N, supportFactor };
   if (layers) {
     const whole = layers.reduce((sum, { share }) => sum + share, 0);
     situation.layers = layers.map(({ share, times }) => ({ share: share / whole, ifd25N: times * ifd25N }));
   }
   if (wrap) {
-    const share = Math.min(1, wrap.thicknessMm / thicknessMm);
-    situation.wrap = { share, lost: Math.min(1, wrap.lostMm / wrap.thicknessMm) };
+    situation.wrap = {
+      share: wrap.thicknessMm / thicknessMm,
+      lost: Math.min(1, wrap.lostMm / wrap.thicknessMm),
+    };
   }
   return situation;
 }

@@ -5,7 +5,13 @@ import type { PieceOf, SetDocument } from '../room/document.ts';
 import { radians } from '../units/angle.ts';
 import { addCushion } from './cushion-part.ts';
 import { sentenceOf, type ParameterSpec, type PieceDefinition } from './kind.ts';
-import { pressedSeatHeightMm, referenceSinkMm, withPressedSeatHeight } from './seat-sink.ts';
+import { cushionHeightMm } from './foam-situation.ts';
+import {
+  pressedRiseMm,
+  pressedSeatHeightMm,
+  unpressedSeatTopMm,
+  withPressedSeatHeight,
+} from './seat-sink.ts';
 import { FIRM_SEAT } from './starting-sizes.ts';
 
 type LooseSeat = PieceOf<'loose-seat'>;
@@ -27,7 +33,7 @@ const PARAMETERS: readonly ParameterSpec<'loose-seat'>[] = [
     read: pressedSeatHeightMm,
     write: (seat, value) => withPressedSeatHeight(seat, Number(value)),
     limits: (seat) => {
-      const rise = seat.seatCushion.thicknessMm - referenceSinkMm(seat);
+      const rise = pressedRiseMm(seat);
       return { min: 200 + rise, max: 1000 + rise };
     },
   },
@@ -100,10 +106,7 @@ export const LOOSE_SEAT: PieceDefinition<'loose-seat'> = {
     const pressed = pressedSeatHeightMm(seat);
     const lean = Math.tan(radians(seat.backLeanDeg));
     const behind = seat.backHeightMm > 0 ? BACK_BOARD_MM / Math.cos(radians(seat.backLeanDeg)) : 0;
-    const top = Math.max(
-      seat.deckHeightMm + seat.seatCushion.thicknessMm,
-      pressed + Math.max(seat.backHeightMm, seat.armHeightMm),
-    );
+    const top = Math.max(unpressedSeatTopMm(seat), pressed + Math.max(seat.backHeightMm, seat.armHeightMm));
     return {
       minMm: [-seat.widthMm / 2, 0, -behind - Math.max(0, top - seat.deckHeightMm) * lean],
       maxMm: [seat.widthMm / 2, top, seat.seatDepthMm],
@@ -148,7 +151,7 @@ function parts(seat: LooseSeat, document?: SetDocument): Part[] {
     centreMm: [0, deckHeightMm - board / 2, seatDepthMm / 2],
     grain: 'z',
   });
-  const { thicknessMm } = seatCushion;
+  const thicknessMm = cushionHeightMm(seatCushion);
   addCushion(list, 'seat', {
     sizeMm: { widthMm: widthMm - 2 * side, depthMm: seatDepthMm, thicknessMm },
     centreMm: [0, deckHeightMm + thicknessMm / 2, seatDepthMm / 2],

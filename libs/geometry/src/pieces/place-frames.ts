@@ -4,6 +4,7 @@ import type { Piece, PieceOf, SetDocument } from '../room/document.ts';
 import { radians } from '../units/angle.ts';
 import { benchLayout, HIP_BEFORE_BACK_MM } from './bench-layout.ts';
 import { seatRun } from './corners.ts';
+import { unpressedSeatTopMm } from './seat-sink.ts';
 
 /** Where one person sits. */
 export interface PlaceFrame {
@@ -33,7 +34,7 @@ const TOLERANCE = 1e-6;
 export function placeFrames(piece: Piece, document?: SetDocument): PlaceFrame[] {
   if (piece.kind === 'bench') return benchPlaces(piece, document);
   if (piece.kind !== 'loose-seat') return [];
-  const top = piece.deckHeightMm + piece.seatCushion.thicknessMm;
+  const top = unpressedSeatTopMm(piece);
   const hipZ = Math.min(HIP_BEFORE_BACK_MM, piece.seatDepthMm);
   return [frame(piece, 1, 0, piece.widthMm, [top, hipZ], [top, piece.seatDepthMm])];
 }

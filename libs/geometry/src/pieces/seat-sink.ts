@@ -1,9 +1,18 @@
 import { REFERENCE_SITTER_KG, seatSinkMm } from '@settlewright/anthropometry';
 import type { PieceOf } from '../room/document.ts';
-import { foamSituation } from './foam-situation.ts';
+import { cushionHeightMm, foamSituation } from './foam-situation.ts';
 
 /** A piece that people sit on. */
 export type SeatPiece = PieceOf<'bench'> | PieceOf<'loose-seat'>;
+
+/**
+ * Top of the seat cushion before anybody sits on it, at the front edge.
+ *
+ * @param piece - bench or loose seat
+ * @returns millimetres above the floor
+ */
+export const unpressedSeatTopMm = (piece: SeatPiece): number =>
+  piece.deckHeightMm + cushionHeightMm(piece.seatCushion);
 
 /**
  * How far the reference sitter of 77 kg presses the seat cushion down.
@@ -18,13 +27,22 @@ export function referenceSinkMm(piece: SeatPiece): number {
 }
 
 /**
+ * How high the pressed seat stands over its deck.
+ *
+ * @param piece - bench or loose seat
+ * @returns millimetres
+ */
+export const pressedRiseMm = (piece: SeatPiece): number =>
+  cushionHeightMm(piece.seatCushion) - referenceSinkMm(piece);
+
+/**
  * Seat height at the front edge with the cushion pressed by the reference sitter.
  *
  * @param piece - bench or loose seat
  * @returns millimetres above the floor
  */
 export function pressedSeatHeightMm(piece: SeatPiece): number {
-  return piece.deckHeightMm + piece.seatCushion.thicknessMm - referenceSinkMm(piece);
+  return piece.deckHeightMm + pressedRiseMm(piece);
 }
 
 /**
@@ -35,5 +53,5 @@ export function pressedSeatHeightMm(piece: SeatPiece): number {
  * @returns the piece with another deck height, not checked against limits
  */
 export function withPressedSeatHeight<P extends SeatPiece>(piece: P, heightMm: number): P {
-  return { ...piece, deckHeightMm: heightMm - piece.seatCushion.thicknessMm + referenceSinkMm(piece) };
+  return { ...piece, deckHeightMm: heightMm - pressedRiseMm(piece) };
 }

@@ -27,7 +27,7 @@ const foamBuild = {
     .min(2)
     .max(4)
     .optional(),
-  /** Polyester round it, inside the cushion's thickness, and how much of that is lost under a sitter. */
+  /** Polyester round it, both faces together, over the cushion's thickness, and how much of that is lost under a sitter. */
   wrap: z.strictObject({ thicknessMm: length(1, 60), lostMm: length(0, 60) }).optional(),
 };
 

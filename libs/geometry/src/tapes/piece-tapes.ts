@@ -2,7 +2,7 @@ import type { Vec3 } from '../parts/part.ts';
 import { toRoom } from '../parts/placement.ts';
 import { benchLayout } from '../pieces/bench-layout.ts';
 import { parametersOf } from '../pieces/parameters.ts';
-import { pressedSeatHeightMm } from '../pieces/seat-sink.ts';
+import { pressedSeatHeightMm, unpressedSeatTopMm } from '../pieces/seat-sink.ts';
 import type { Piece, PieceOf } from '../room/document.ts';
 import type { TapeLine } from './tape-line.ts';
 
@@ -45,8 +45,8 @@ function ofBench(bench: PieceOf<'bench'>): Measured[] {
     {
       key: 'seatCushion.thicknessMm',
       name: 'cushion',
-      from: [half + OFF_MM, top - bench.seatCushion.thicknessMm, frontZMm],
-      to: [half + OFF_MM, top, frontZMm],
+      from: [half + OFF_MM, bench.deckHeightMm, frontZMm],
+      to: [half + OFF_MM, bench.deckHeightMm + bench.seatCushion.thicknessMm, frontZMm],
     },
     ...(bench.places.by === 'width'
       ? [
@@ -100,7 +100,7 @@ function ofLooseSeat(seat: PieceOf<'loose-seat'>): Measured[] {
   const x = seat.widthMm / 2;
   const z = seat.seatDepthMm;
   const pressed = pressedSeatHeightMm(seat);
-  const top = seat.deckHeightMm + seat.seatCushion.thicknessMm;
+  const top = unpressedSeatTopMm(seat);
   const side = -x - OFF_MM;
   return [
     { key: 'pressedSeatHeight', name: 'seat', from: [side, 0, z], to: [side, pressed, z] },

@@ -1,4 +1,5 @@
 import {
+  buildPhrase,
   curveWords,
   cushionWarningWords,
   edgeWords,
@@ -56,6 +57,7 @@ export function CushionFacts({ spec, words, covers }: CushionFactsProps) {
   const sawn = making && outlineExtent(making.foam.outline);
   const closed = making?.closure;
   const drop = orderDrop(spec);
+  const built = phraseText(buildPhrase(foam, spec.finishedMm.thicknessMm), format.style);
   const show = (mm: number) => <Measure text={format.length(mm)} />;
   return (
     <dl className="grid content-start gap-x-8 border-t border-rule @min-[36rem]:@max-[54rem]:grid-cols-2">
@@ -73,6 +75,7 @@ export function CushionFacts({ spec, words, covers }: CushionFactsProps) {
           </>
         )}
         {foamText(foam, format.style)}
+        {built !== '' && `; ${built}`}
         {words.foam !== '' && `; ${words.foam}`}
       </Row>
       {drop && <Row name="Loaded">{orderDropWords(drop, format.style)}</Row>}

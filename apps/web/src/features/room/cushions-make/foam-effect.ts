@@ -11,6 +11,7 @@ import {
   isLoss,
   sheetChanges,
   testedOf,
+  unpressedSeatTopMm,
   withTested,
   type Foam,
   type SetDocument,
@@ -96,7 +97,7 @@ const stateWord = (state: Verdict | 'inside' | 'outside' | 'gone'): string =>
       : verdictWord(state);
 
 function seatUnder(piece: CushionedPiece, { name, weightKg }: { name: string; weightKg: number }): SeatUnder {
-  const top = piece.deckHeightMm + piece.seatCushion.thicknessMm;
+  const top = unpressedSeatTopMm(piece);
   const foam = foamSituation(piece.seatCushion);
   if (!foam) return { name, heightMm: { low: top, best: top, high: top }, bottomsOut: 'no' };
   const { lowMm, bestMm, highMm, bottomsOut } = sinkBand(foam, weightKg);

@@ -69,7 +69,7 @@ export function FoamFields({
         {facts(cushion.foam)}, {format.length(cushion.thicknessMm)} thick
         {cushion.foam.layers && `, in ${cushion.foam.layers.length} layers`}
         {cushion.foam.wrap &&
-          `, ${format.length(cushion.foam.wrap.thicknessMm)} of it wrap, of which ${format.length(cushion.foam.wrap.lostMm)} is lost under a sitter`}
+          `, with ${format.length(cushion.foam.wrap.thicknessMm)} of wrap over it, of which ${format.length(cushion.foam.wrap.lostMm)} is lost under a sitter`}
         .
       </p>
       {canEdit && (

@@ -184,7 +184,9 @@ describe('another foam', () => {
       ],
       wrap: { thicknessMm: 25.4, lostMm: 12.7 },
     });
-    expect(screen.getByText(/in 2 layers, 1″ of it wrap, of which ½″ is lost under a sitter/)).toBeVisible();
+    expect(
+      screen.getByText(/in 2 layers, with 1″ of wrap over it, of which ½″ is lost under a sitter/),
+    ).toBeVisible();
   });
 
   it('that is softer lets everybody down, the heaviest most, within its band', () => {

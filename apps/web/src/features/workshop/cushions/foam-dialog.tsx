@@ -134,7 +134,7 @@ export function FoamDialog({ workshopId, kept, index, onClose }: FoamDialogProps
           onChange={(wrapMm) => set({ wrapMm })}
           minMm={0}
           maxMm={60}
-          description="Bonded polyester; nothing for none."
+          description="Bonded polyester, over the thickness; nothing for none."
           error={typed.wrapMm.problem}
         />
         <FoamLayers layers={typed.layers} onChange={(layers) => set({ layers })} />
