@@ -4336,6 +4336,8 @@ export interface components {
             widthMm: number;
             heightMm: number;
             borderMm: number;
+            /** @enum {string} */
+            columnsOn?: "joints" | "board-centres";
         };
         CushionTuftingDto: {
             /** @enum {string} */

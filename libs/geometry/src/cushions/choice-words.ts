@@ -7,7 +7,7 @@ import type { CushionShape } from './cushion-shape.ts';
 import type { CushionSpec } from './cushion-spec.ts';
 import type { RunJoints } from './run-joints.ts';
 import { CLOSURE_WORDS, CONSTRUCTION_WORDS, WELT_WORDS, type CushionMake } from './making/cushion-make.ts';
-import { TUFTING_WORDS, type TuftingChoice } from './tufting-choice.ts';
+import { TUFT_LINE_WORDS, TUFTING_WORDS, type TuftingChoice } from './tufting-choice.ts';
 import { allWearPhrase } from './wear.ts';
 
 /**
@@ -104,8 +104,9 @@ export function tuftingWords(tufting: TuftingChoice, style: LengthStyle): string
   const show = (mm: number) => formatLength(mm, { ...style, feet: false });
   const words = TUFTING_WORDS[tufting.kind];
   if (tufting.kind === 'none' || tufting.kind === 'pull-in') return words;
-  const { tuftMm, borderMm } = tufting;
-  return `${words} about ${show(tuftMm.widthMm)} × ${show(tuftMm.heightMm)}, border ${show(borderMm)}`;
+  const { tuftMm, borderMm, columnsOn } = tufting;
+  const size = `${words} about ${show(tuftMm.widthMm)} × ${show(tuftMm.heightMm)}, border ${show(borderMm)}`;
+  return columnsOn ? `${size}, ${TUFT_LINE_WORDS[columnsOn]}` : size;
 }
 
 /**

@@ -166,6 +166,32 @@ describe('tufting', () => {
     expect(chosen('bench-window', 'back', {}).spec.warnings).toEqual([]);
   });
 
+  it('stands on the joints or centres of the boards where that is chosen, and is not warned of', () => {
+    for (const kind of ['biscuit', 'diamond'] as const) {
+      const on = (columnsOn: 'joints' | 'board-centres') =>
+        chosen('bench-window', 'back', { tufting: { kind, ...field, columnsOn } });
+      const { document, spec } = on('joints');
+      const { moduleMm } = boardLines(benchOf(document, spec.benchId));
+      expect(spec.buttons.columns.length).toBeGreaterThan(2);
+      for (const { offJointMm } of spec.buttons.columns) expect(offJointMm).toBeCloseTo(0, 9);
+      expect(spec.warnings).toEqual([]);
+      expect(spec.faults).toEqual([]);
+      // Whole boards to a tuft, both columns of a diamond on a joint.
+      const columnsOfOne = kind === 'diamond' ? 2 : 1;
+      const boards = spec.tufting.field!.widthMm / columnsOfOne / moduleMm;
+      expect(boards).toBeCloseTo(Math.round(boards), 9);
+      const centres = on('board-centres').spec;
+      for (const { offJointMm } of centres.buttons.columns) {
+        expect(Math.abs(offJointMm)).toBeCloseTo(moduleMm / 2, 6);
+      }
+      expect(centres.warnings).toEqual([]);
+    }
+    const none = chosen('bench-window', 'back', {
+      tufting: { kind: 'diamond', ...field, borderMm: 500, columnsOn: 'joints' },
+    }).spec;
+    expect(none.faults).toEqual(['the border leaves no room for tufts on board lines']);
+  });
+
   it('stays inside the outline, or says how many buttons do not', () => {
     const { spec } = chosen('bench-window', 'back', {
       shape: { notches: [{ edge: 'back', fromMm: 0, widthMm: 300, depthMm: 300 }] },

@@ -9,6 +9,7 @@ import type { CushionSettings } from './cushion-settings.ts';
 import type { ButtonTable, CushionTufting, RowsOverSeat } from './cushion-spec.ts';
 import type { TuftingChoice } from './tufting-choice.ts';
 import { borderedField } from './tufting.ts';
+import { tuftColumns } from './tufts-on-lines.ts';
 
 /** A cushion on its bench, in the bench's own x. */
 export interface OnBench {
@@ -85,23 +86,42 @@ function offJoint(x: number, { lines, fromDatum }: OnBench): number {
   return Number.isFinite(nearest) ? fromDatum(x) - fromDatum(nearest) : 0;
 }
 
-/** Tufts that fill the face within its border. */
+/** Tufts that fill the face within its border, or stand on the lines of the boards behind. */
 function fieldOf(choice: Extract<TuftingChoice, { kind: 'biscuit' | 'diamond' }>, on: OnBench): Buttoned {
-  const { kind, borderMm, tuftMm, fullness } = choice;
+  const { kind, borderMm, tuftMm, fullness, columnsOn } = choice;
   const { widthMm, depthMm, thicknessMm } = on.finishedMm;
-  const { across, high, diamond } = borderedField({ widthMm, heightMm: depthMm }, borderMm, tuftMm);
-  const tufting: CushionTufting = {
-    kind,
-    pullMm: choice.pullMm ?? thicknessMm,
-    field: { across, high, ...diamond, borderMm },
-    fullness,
-  };
-  if (across === 0 || high === 0) return { tufting, buttons: table('field') };
+  const filled = borderedField({ widthMm, heightMm: depthMm }, borderMm, tuftMm);
+  const { high } = filled;
+  const { heightMm } = filled.diamond;
   const steps = kind === 'diamond' ? 2 : 1;
   const along = (count: number, one: number): number[] =>
     Array.from({ length: steps * count + 1 }, (_, i) => borderMm + (i * one) / steps);
-  const xs = along(across, diamond.widthMm).map((mm) => on.seams.low + mm);
-  const rowsMm = along(high, diamond.heightMm);
+  const xs = columnsOn
+    ? tuftColumns({
+        linesMm: (columnsOn === 'joints' ? on.lines?.jointsMm : on.lines?.centresMm) ?? [],
+        lowMm: on.seams.low,
+        highMm: on.seams.high,
+        ...{ borderMm, widthMm: tuftMm.widthMm, steps },
+      })
+    : filled.across > 0
+      ? along(filled.across, filled.diamond.widthMm).map((mm) => on.seams.low + mm)
+      : [];
+  const across = Math.max(0, (xs.length - 1) / steps);
+  const tufting: CushionTufting = {
+    kind,
+    pullMm: choice.pullMm ?? thicknessMm,
+    field: {
+      across,
+      high,
+      widthMm: across > 0 ? (xs.at(-1)! - xs[0]!) / across : 0,
+      ...{ heightMm, borderMm },
+      ...(columnsOn && { columnsOn }),
+    },
+    fullness,
+  };
+  const alignedTo = columnsOn ?? 'field';
+  if (across === 0 || high === 0) return { tufting, buttons: table(alignedTo) };
+  const rowsMm = along(high, heightMm);
   const columns = columnsAt(xs, on);
   const all = columns.length * rowsMm.length;
   return {
@@ -112,7 +132,7 @@ function fieldOf(choice: Extract<TuftingChoice, { kind: 'biscuit' | 'diamond' }>
       // Both counts are odd: of a chessboard so large one more than half is of one colour.
       count: kind === 'diamond' ? (all + 1) / 2 : all,
       pattern: kind === 'diamond' ? 'staggered' : 'grid',
-      alignedTo: 'field',
+      alignedTo,
     },
   };
 }

@@ -5,7 +5,7 @@ import type { CushionSize } from './cushion-sizes.ts';
 import type { CushionWarning } from './cushion-warning.ts';
 import type { CushionMake } from './making/cushion-make.ts';
 import type { CushionPanels } from './making/cut-panels.ts';
-import type { TuftingKind } from './tufting-choice.ts';
+import type { TuftingKind, TuftLinesOf } from './tufting-choice.ts';
 import type { FullnessRule } from './tufting.ts';
 import type { WearArea } from './wear.ts';
 
@@ -74,7 +74,15 @@ export interface CushionTufting {
   /** How far the buttons go in; 0 without buttons. */
   pullMm: number;
   /** Of biscuits and diamonds: how many, the true size of one, and the border that is left. */
-  field?: { across: number; high: number; widthMm: number; heightMm: number; borderMm: number };
+  field?: {
+    across: number;
+    high: number;
+    widthMm: number;
+    heightMm: number;
+    /** Where columns stand on board lines: the least at the ends. */
+    borderMm: number;
+    columnsOn?: TuftLinesOf;
+  };
   /** Rule by which the cloth of the face has its fullness. */
   fullness?: FullnessRule;
 }

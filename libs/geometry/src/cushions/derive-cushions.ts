@@ -101,7 +101,10 @@ function cushionOf(
     ...(choice.wear?.length && { wear: choice.wear }),
     ...(choice.notes && { notes: choice.notes }),
   };
-  const onJoints = piece.kind === 'bench' && piece.upholstery.buttons.alignTo === 'joints';
+  const { alignedTo } = buttons;
+  const wanted =
+    piece.kind === 'bench' && alignedTo === 'field' ? piece.upholstery.buttons.alignTo : alignedTo;
+  const onJoints = piece.kind === 'bench' && wanted === 'joints';
   return { ...spec, warnings: cushionWarnings({ ...spec, onJoints, drawn: Boolean(choice.shape?.drawn) }) };
 }
 

@@ -8,11 +8,23 @@ const pullMm = length(1, 250).optional();
 
 const RULES = ['foam-thickness', 'half-again'] as const satisfies readonly FullnessRule[];
 
-/** A field of tufts: the size wanted of one, the border left free, and the rule that gives the cloth its fullness. */
+const TUFT_LINES = ['joints', 'board-centres'] as const;
+
+export type TuftLinesOf = (typeof TUFT_LINES)[number];
+
+/** The same in words. */
+export const TUFT_LINE_WORDS: Record<TuftLinesOf, string> = {
+  joints: 'columns on board joints',
+  'board-centres': 'columns on board centres',
+};
+
+/** A field of tufts: the size wanted of one, the border left free, what its columns stand on, and the rule that gives the cloth its fullness. */
 const field = {
   pullMm,
   tuftMm: z.strictObject({ widthMm: length(20, 1000), heightMm: length(20, 1000) }),
   borderMm: length(0, 500),
+  /** Board lines the columns stand on; absent: they fill the face within its border. */
+  columnsOn: z.enum(TUFT_LINES).optional(),
   fullness: z.enum(RULES),
 };
 

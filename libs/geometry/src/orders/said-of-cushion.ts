@@ -3,7 +3,7 @@ import { buildPhrase } from '../cushions/build-phrase.ts';
 import { edgeWords, makeWords } from '../cushions/choice-words.ts';
 import type { CushionSpec } from '../cushions/cushion-spec.ts';
 import { FULLNESS_RULES } from '../cushions/tufting.ts';
-import { TUFTING_WORDS } from '../cushions/tufting-choice.ts';
+import { TUFT_LINE_WORDS, TUFTING_WORDS } from '../cushions/tufting-choice.ts';
 import { allWearPhrase } from '../cushions/wear.ts';
 import { isRectangle, outlineStretches, type OutlineCorner } from '../outlines/outline.ts';
 import { joined, phrase, type Phrase } from '../units/phrase.ts';
@@ -106,8 +106,9 @@ function tuftingPhrase({ tufting: { kind, pullMm, field, fullness } }: CushionSp
       TUFTING_WORDS[kind],
       pullMm > 0 && kind !== 'none' ? phrase`pulled in ${{ mm: pullMm }}` : [],
       field
-        ? phrase`${String(field.across)} × ${String(field.high)} of ${{ mm: field.widthMm }} × ${{ mm: field.heightMm }}, border ${{ mm: field.borderMm }}`
+        ? phrase`${String(field.across)} × ${String(field.high)} of ${{ mm: field.widthMm }} × ${{ mm: field.heightMm }}, border ${{ mm: field.borderMm }}${field.columnsOn ? ' above and below' : ''}`
         : [],
+      field?.columnsOn ? TUFT_LINE_WORDS[field.columnsOn] : [],
       fullness ? FULLNESS_RULES[fullness].words : [],
     ],
     ', ',

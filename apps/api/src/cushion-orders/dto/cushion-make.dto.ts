@@ -7,6 +7,7 @@ import type {
   CushionSpec,
   CutPanel,
   OutlineCorner,
+  TuftLinesOf,
 } from '@settlewright/geometry';
 import { CONSTRUCTIONS, CUSHION_EDGES } from '@settlewright/geometry';
 
@@ -103,6 +104,8 @@ export class TuftFieldDto {
   heightMm: number;
   @ApiProperty()
   borderMm: number;
+  @ApiPropertyOptional({ enum: ['joints', 'board-centres'] })
+  columnsOn?: TuftLinesOf;
 }
 
 export class CushionTuftingDto {

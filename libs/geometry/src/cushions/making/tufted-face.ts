@@ -26,7 +26,8 @@ export function withTuftedFace(
   const { field, fullness, pullMm } = tufting;
   if (!field || !fullness) return { ok: true, made };
   if (field.across === 0 || field.high === 0) {
-    return { ok: false, fault: 'the border leaves no room for tufts' };
+    const fault = 'the border leaves no room for tufts';
+    return { ok: false, fault: field.columnsOn ? `${fault} on board lines` : fault };
   }
   const face = made.panels.find(({ name }) => name === 'plate' || name === 'cover');
   if (!face)

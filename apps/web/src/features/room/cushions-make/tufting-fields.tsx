@@ -1,4 +1,11 @@
-import { FULLNESS_RULES, TUFTING_WORDS, type FullnessRule, type TuftingChoice } from '@settlewright/geometry';
+import {
+  FULLNESS_RULES,
+  TUFT_LINE_WORDS,
+  TUFTING_WORDS,
+  type FullnessRule,
+  type TuftingChoice,
+  type TuftLinesOf,
+} from '@settlewright/geometry';
 import { Select } from '@/components/select.tsx';
 import { TakenLength } from './taken-length.tsx';
 import type { Making } from './use-make.ts';
@@ -6,6 +13,8 @@ import type { Making } from './use-make.ts';
 type Kind = TuftingChoice['kind'];
 
 const AS_BENCH = 'as-the-bench';
+const FILL = 'fill';
+const FILL_WORDS = 'columns fill the face';
 const RULES = (Object.keys(FULLNESS_RULES) as FullnessRule[]).map((value) => ({
   value,
   words: FULLNESS_RULES[value].words,
@@ -19,7 +28,7 @@ function firstOf(kind: Kind): TuftingChoice {
 }
 
 /** Buttons and tufts of a cushion; where buttons stand on board lines is chosen with the bench. */
-export function TuftingFields({ spec, choice, canEdit, choose }: Making) {
+export function TuftingFields({ spec, piece, choice, canEdit, choose }: Making) {
   const chosen = choice.tufting;
   const isField = chosen?.kind === 'diamond' || chosen?.kind === 'biscuit';
   const { field } = spec.tufting;
@@ -52,6 +61,24 @@ export function TuftingFields({ spec, choice, canEdit, choose }: Making) {
             options={RULES}
             onChange={(fullness) => choose({ tufting: { ...chosen, fullness } }, 'fullness of the cloth')}
           />
+          {piece.kind === 'bench' && (
+            <Select<TuftLinesOf | typeof FILL>
+              label="Columns"
+              value={chosen.columnsOn ?? FILL}
+              options={[
+                { value: FILL, words: FILL_WORDS },
+                ...(Object.keys(TUFT_LINE_WORDS) as TuftLinesOf[]).map((value) => ({
+                  value,
+                  words: TUFT_LINE_WORDS[value],
+                })),
+              ]}
+              onChange={(to) => {
+                const { columnsOn: _, ...others } = chosen;
+                if (to === FILL) choose({ tufting: others }, FILL_WORDS);
+                else choose({ tufting: { ...others, columnsOn: to } }, TUFT_LINE_WORDS[to]);
+              }}
+            />
+          )}
           <TakenLength
             label="Width of one, about"
             valueMm={chosen.tuftMm.widthMm}
