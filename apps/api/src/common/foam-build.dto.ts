@@ -7,9 +7,9 @@ type Wrap = NonNullable<FoamBuild['wrap']>;
 
 /** One layer of a laminated foam, as in the set document. */
 export class CushionFoamLayerDto implements Layer {
-  @ApiProperty({ minimum: 0.01, maximum: 1, description: 'of the foam' })
+  @ApiProperty({ minimum: 0.003, maximum: 1, description: 'of the foam' })
   @IsNumber()
-  @Min(0.01)
+  @Min(0.003)
   @Max(1)
   share: number;
 

@@ -1,8 +1,10 @@
 import { seatSinkMm } from '@settlewright/anthropometry';
 import { describe, expect, it } from 'vitest';
 import { foamSituation } from '../pieces/foam-situation.ts';
+import { ARRANGEMENTS } from '../room/arrangements.ts';
+import { setDocumentSchema } from '../room/document.ts';
 import { CUSHION_SETTINGS } from './cushion-settings.ts';
-import { foamOfGrade, type FoamGrade } from './foam-grades.ts';
+import { foamGradeSchema, foamOfGrade, type FoamGrade } from './foam-grades.ts';
 
 const LBF_N = 4.4482216152605;
 const POUND_KG = 0.45359237;
@@ -32,6 +34,18 @@ describe('a foam as a piece has it', () => {
     const four = 0.25 * 2.05 + 0.75 * 1.61;
     expect(dropIn(laminated, 200)).toBeCloseTo(four, 2);
     expect(dropIn(laminated, 200, 127)).toBeCloseTo(1.25 * four, 2);
+  });
+
+  it('is taken by a set document, the thinnest layer among the thickest as well', () => {
+    const thin = grade({ layers: [layer(3, 20), layer(250, 36), layer(250, 36), layer(250, 36)] });
+    expect(foamGradeSchema.safeParse(thin).success).toBe(true);
+    const document = ARRANGEMENTS[0]!.build();
+    const pieces = document.pieces.map((piece) =>
+      piece.kind === 'bench'
+        ? { ...piece, seatCushion: { ...piece.seatCushion, foam: foamOfGrade(thin, 12.7) } }
+        : piece,
+    );
+    expect(setDocumentSchema.safeParse({ ...document, pieces }).error).toBeUndefined();
   });
 
   it('is firmer in every layer where the whole is made firmer', () => {

@@ -23,7 +23,7 @@ const foamBuild = {
   supportFactor: length(1.2, 4),
   /** From the top down, where it is laminated: its share of the foam's thickness, and its firmness as times that of the whole. */
   layers: z
-    .array(z.strictObject({ share: length(0.01, 1), times: length(0.03, 30) }))
+    .array(z.strictObject({ share: length(0.003, 1), times: length(0.03, 30) }))
     .min(2)
     .max(4)
     .optional(),
