@@ -1,3 +1,8 @@
+/** Labels keep so far off the edge of the sheet, CSS pixels. */
+export const EDGE = 6;
+/** A head as labels keep clear of it. */
+export const HEAD_WIDTH_MM = 160;
+
 /** Edges of something on the sheet, CSS pixels. */
 export interface Box {
   left: number;
@@ -13,6 +18,19 @@ export const boxAt = (x: number, y: number, width: number, height: number): Box 
   top: y - height / 2,
   bottom: y + height / 2,
 });
+
+/** The box of something placed by its middle. */
+export const boxOf = ({
+  x,
+  y,
+  width,
+  height,
+}: {
+  x: number;
+  y: number;
+  width: number;
+  height: number;
+}): Box => boxAt(x, y, width, height);
 
 /** Whether two boxes come nearer to each other than a gap. */
 export const meet = (a: Box, b: Box, gap: number): boolean =>

@@ -6,9 +6,10 @@ import type { SeatedBody } from '../picture.ts';
 import { useSurroundings } from '../room-context.tsx';
 import type { ViewController } from '../scene/view-controller.ts';
 import { mix } from '../scene/vectors.ts';
-import { boxAt, type LabelBoxes } from './box.ts';
+import { boxOf, type LabelBoxes } from './box.ts';
 import { createLabelLayer } from './label-layer.ts';
-import { isEndOn, placeFlags, placeNames, placeNamesAtHeads, tapePath, type Blob } from './layout.ts';
+import { isEndOn, placeFlags, tapePath, type Blob } from './place-flags.ts';
+import { placeNames, placeNamesAtHeads } from './place-names.ts';
 import { TapeFlag } from './tape-flag.tsx';
 import { tapeTone } from './tape-words.ts';
 import { shortName } from '@/lib/short-name.ts';
@@ -51,10 +52,6 @@ export function Overlay(props: Props) {
     if (!frame) return;
     const viewport = controller.viewport();
     const { find, sizeOf } = layer;
-    const boxOf = (kind: string, { id, x, y }: { id: string; x: number; y: number }) => {
-      const { width, height } = sizeOf(kind, id);
-      return boxAt(x, y, width, height);
-    };
     const headsMm = bodies.map((body) => body.crownMm);
     const names = (namesAtHeads ? placeNamesAtHeads : placeNames)(
       frame,
@@ -116,7 +113,7 @@ export function Overlay(props: Props) {
         : '';
       find<SVGPathElement>('tape-leader', flag.id)?.setAttribute('d', leader);
     }
-    labels.tell([...names.map((name) => boxOf('name', name)), ...placed.map((flag) => boxOf('flag', flag))]);
+    labels.tell([...names, ...placed].map(boxOf));
   }, [controller, layer, labels, namesAtHeads, bodies, tapes, style]);
   const layOutAnew = useCallback(() => {
     layer.renew(root.current);

@@ -1,6 +1,6 @@
 import { describe, expect, it } from 'vitest';
 import type { ViewFrame } from '../scene/view-frame.ts';
-import { isEndOn, placeFlags, placeNames, placeNamesAtHeads, tapePath } from './layout.ts';
+import { isEndOn, placeFlags, tapePath } from './place-flags.ts';
 
 const frame: ViewFrame = {
   target: [0, 0, 0],
@@ -12,66 +12,6 @@ const frame: ViewFrame = {
   depthMm: [3000, -3000],
 };
 const viewport = { width: 800, height: 400 };
-
-describe('names at the heads', () => {
-  it('stand below them, the next a row lower where heads are nearer than names are wide', () => {
-    const heads = [-250, -100, 400].map((x, n) => ({
-      id: `p${n}`,
-      headMm: [x, 0, 0] as const,
-      width: 70,
-      height: 16,
-    }));
-    const [one, next, far] = placeNamesAtHeads(frame, viewport, heads);
-    expect(next!.x - one!.x).toBeLessThan(70);
-    expect(next!.y - one!.y).toBeGreaterThanOrEqual(17);
-    expect(far!.y).toBe(one!.y);
-  });
-});
-
-describe('names above the heads', () => {
-  it('stand in one row in the order of the heads, apart from each other', () => {
-    const heads = [300, -250, -200, 320].map((x, n) => ({
-      id: `p${n}`,
-      headMm: [x, 300 - n * 40, 0] as const,
-      width: 70,
-      height: 16,
-    }));
-    const placed = placeNames(frame, viewport, heads);
-    expect(placed.map((name) => name.id)).toEqual(['p1', 'p2', 'p0', 'p3']);
-    expect(new Set(placed.map((name) => name.y)).size).toBe(1);
-    placed
-      .slice(1)
-      .forEach((name, n) => expect(name.x - (placed[n]?.x ?? 0)).toBeGreaterThanOrEqual(88 - 1e-6));
-  });
-
-  it('stay on the sheet when the heads crowd at its edge', () => {
-    const heads = [1800, 1810, 1820, 1830].map((x, n) => ({
-      id: `p${n}`,
-      headMm: [x, 0, 0] as const,
-      width: 90,
-      height: 16,
-    }));
-    for (const name of placeNames(frame, viewport, heads))
-      expect(name.x + 45).toBeLessThanOrEqual(794 + 1e-6);
-  });
-
-  it('take further rows where one is too short, and stay on the sheet', () => {
-    const heads = Array.from({ length: 14 }, (_, n) => ({
-      id: `p${n}`,
-      headMm: [n * 120 - 800, 300, 0] as const,
-      width: 110,
-      height: 16,
-    }));
-    const placed = placeNames(frame, viewport, heads);
-    expect(new Set(placed.map((name) => name.id)).size).toBe(14);
-    for (const name of placed) {
-      expect(name.x - 55).toBeGreaterThanOrEqual(6 - 1e-6);
-      expect(name.x + 55).toBeLessThanOrEqual(794 + 1e-6);
-      for (const other of placed)
-        expect(other === name || other.y !== name.y || Math.abs(other.x - name.x) >= 128 - 1e-6).toBe(true);
-    }
-  });
-});
 
 describe('tape flags', () => {
   const flag = (id: string) => ({
@@ -118,6 +58,14 @@ describe('tape flags', () => {
     expect(Math.abs((placed?.y ?? 0) - 200) > 12 || Math.abs((placed?.x ?? 0) - 400) > 40).toBe(true);
   });
 
+  it('leave names of any length free where these stand in several rows', () => {
+    const long = { id: 'p', x: 400, y: 200, width: 190, height: 20, head: { x: 400, y: 120 } };
+    const other = { ...long, id: 'q', y: 20 };
+    const beside = { ...flag('a'), fromMm: [425, -400, 0] as const, toMm: [425, 400, 0] as const };
+    const [placed] = placeFlags(frame, viewport, [{ ...beside, width: 40 }], [], [long, other]);
+    expect(Math.abs(placed!.x - long.x) >= 115 || Math.abs(placed!.y - long.y) >= 22).toBe(true);
+  });
+
   it('stand off a line that they would hide, with a leader to it', () => {
     const short = { ...flag('gap'), fromMm: [0, 0, 0] as const, toMm: [0, 40, 0] as const };
     const [placed] = placeFlags(frame, viewport, [short], [], []);
@@ -140,7 +88,6 @@ describe('the tape itself', () => {
 
   it('draws nothing for a tape that the view cannot place', () => {
     const nowhere = { x: NaN, y: NaN, depth: 0 };
-    const placed = { id: 't', x: 0, y: 0, from: nowhere, to: nowhere };
-    expect(tapePath(placed, 254, 25.4)).toBe('');
+    expect(tapePath({ from: nowhere, to: nowhere }, 254, 25.4)).toBe('');
   });
 });

@@ -1,15 +1,9 @@
 import type { Vec3 } from '@settlewright/geometry';
 import { project, type ScreenPoint, type ViewFrame, type Viewport } from '../scene/view-frame.ts';
-import { boxAt, meet, type Box } from './box.ts';
+import { boxAt, boxOf, EDGE, HEAD_WIDTH_MM, meet, type Box } from './box.ts';
+import type { PlacedName } from './place-names.ts';
 
-/** Labels are laid out in CSS pixels over the picture; sizes are those of the rendered elements. */
-export interface NameToPlace {
-  id: string;
-  headMm: Vec3;
-  width: number;
-  height: number;
-}
-
+/** A flag to be placed over the picture, in CSS pixels; its size is that of the rendered element. */
 export interface FlagToPlace {
   id: string;
   fromMm: Vec3;
@@ -18,18 +12,13 @@ export interface FlagToPlace {
   height: number;
 }
 
-export interface PlacedName {
-  id: string;
-  /** Middle of the words. */
-  x: number;
-  y: number;
-  head: { x: number; y: number };
-}
-
 export interface PlacedFlag {
   id: string;
+  /** Its middle. */
   x: number;
   y: number;
+  width: number;
+  height: number;
   from: ScreenPoint;
   to: ScreenPoint;
   /** Where a leader starts when the flag had to leave its line. */
@@ -42,85 +31,7 @@ export interface Blob {
   radiusMm: number;
 }
 
-const NAME_GAP = 18;
-const NAME_ROW = 20;
-const NAME_ABOVE_HEADS = 46;
-const EDGE = 6;
-const HEAD_WIDTH_MM = 160;
 const HEAD_HEIGHT_MM = 240;
-
-/** Puts names into one row, or into several where one is too short, in the order of their heads so that no leader crosses another. */
-export function placeNames(
-  frame: ViewFrame,
-  viewport: Viewport,
-  names: readonly NameToPlace[],
-): PlacedName[] {
-  const heads = names
-    .map((name) => ({ name, head: project(frame, viewport, name.headMm) }))
-    .filter(({ head }) => head.x > EDGE && head.x < viewport.width - EDGE)
-    .sort((a, b) => a.head.x - b.head.x);
-  if (heads.length === 0) return [];
-  const words = heads.reduce((sum, { name }) => sum + name.width + NAME_GAP, -NAME_GAP);
-  const rows = Math.max(1, Math.ceil(words / Math.max(1, viewport.width - 2 * EDGE)));
-  const highest = Math.min(...heads.map(({ head }) => head.y));
-  const first = Math.min(highest - NAME_ABOVE_HEADS, viewport.height - 20);
-  const y = Math.max(14 + (rows - 1) * NAME_ROW, first);
-  // Who does not find room in one row stands in turns in the rows above it.
-  return Array.from({ length: rows }, (_, row) =>
-    rowOf(
-      heads.filter((_head, n) => n % rows === row),
-      viewport.width,
-      y - row * NAME_ROW,
-    ),
-  ).flat();
-}
-
-interface Head {
-  name: NameToPlace;
-  head: ScreenPoint;
-}
-
-function rowOf(heads: readonly Head[], width: number, y: number): PlacedName[] {
-  const left: number[] = [];
-  let edge = EDGE;
-  for (const { name, head } of heads) {
-    const at = Math.max(edge, head.x - name.width / 2);
-    left.push(at);
-    edge = at + name.width + NAME_GAP;
-  }
-  let limit = width - EDGE;
-  for (let n = heads.length - 1; n >= 0; n--) {
-    const wide = heads[n]?.name.width ?? 0;
-    left[n] = Math.max(EDGE, Math.min(left[n] ?? 0, limit - wide));
-    limit = (left[n] ?? 0) - NAME_GAP;
-  }
-  return heads.map(({ name, head }, n) => ({
-    id: name.id,
-    x: (left[n] ?? 0) + name.width / 2,
-    y,
-    head: { x: head.x, y: head.y },
-  }));
-}
-
-/** Seen from above: each name just below its own head. */
-export function placeNamesAtHeads(
-  frame: ViewFrame,
-  viewport: Viewport,
-  names: readonly NameToPlace[],
-): PlacedName[] {
-  const pixels = viewport.height / (2 * frame.halfHeightMm);
-  const taken: Box[] = [];
-  return names.map(({ id, headMm, width, height }) => {
-    const head = project(frame, viewport, headMm);
-    const x = Math.min(Math.max(head.x, EDGE + width / 2), viewport.width - EDGE - width / 2);
-    const below = head.y + HEAD_WIDTH_MM * 0.75 * pixels + height / 2;
-    // Heads side by side may be nearer than their names are wide: the next stands a row lower.
-    const rows = [0, 1, 2].map((row) => boxAt(x, below + row * (height + 2), width, height));
-    const box = rows.find((row) => !taken.some((other) => meet(row, other, 1))) ?? rows[0]!;
-    taken.push(box);
-    return { id, x, y: (box.top + box.bottom) / 2, head };
-  });
-}
 
 /** Flags and names stand so far apart, CSS pixels. */
 const APART = 4;
@@ -162,7 +73,7 @@ export function placeFlags(
   const [row] = rows;
   if (rows.size === 1 && row !== undefined) {
     taken.push({ left: 0, right: viewport.width, top: row - 12, bottom: row + 12 });
-  } else taken.push(...names.map((name) => boxAt(name.x, name.y, 90, 18)));
+  } else taken.push(...names.map(boxOf));
   const shy: Box[] = bodies.map(({ atMm, radiusMm }) => {
     const at = project(frame, viewport, atMm);
     return boxAt(at.x, at.y, radiusMm * 2 * pixels, radiusMm * 2 * pixels);
@@ -185,8 +96,9 @@ export function placeFlags(
     const on = (t: number) => ({ x: from.x + (to.x - from.x) * t, y: from.y + (to.y - from.y) * t });
     const middle = on(0.5);
     const keep = (x: number, y: number, leader: boolean): PlacedFlag => {
-      taken.push(boxAt(x, y, flag.width, flag.height));
-      return { id: flag.id, x, y, from, to, ...(leader ? { leader: middle } : {}) };
+      const { id, width, height } = flag;
+      taken.push(boxAt(x, y, width, height));
+      return { id, x, y, width, height, from, to, ...(leader ? { leader: middle } : {}) };
     };
     // A line much shorter than its flag would vanish behind it.
     const hides = length < Math.abs(across.x) * flag.height * 1.4 + Math.abs(across.y) * flag.width * 1.25;
@@ -214,7 +126,7 @@ export function placeFlags(
 }
 
 /** The tape as a path: the line, its two end ticks, and true ticks along one side. */
-export function tapePath(placed: PlacedFlag, lengthMm: number, tickMm: number): string {
+export function tapePath(placed: Pick<PlacedFlag, 'from' | 'to'>, lengthMm: number, tickMm: number): string {
   const { from, to } = placed;
   const length = Math.hypot(to.x - from.x, to.y - from.y);
   // Also false for a point that the view cannot place, as on a sheet without height.
