@@ -92,7 +92,13 @@ export { buildPhrase } from './cushions/build-phrase.ts';
 export { foamOfCushion } from './cushions/foam-of-cushion.ts';
 export { plainMake } from './cushions/made-of.ts';
 export type { RunJoints } from './cushions/run-joints.ts';
-export { TUFTING_WORDS, type TuftingChoice } from './cushions/tufting-choice.ts';
+export { isSame } from './room/leaves.ts';
+export {
+  TUFT_LINE_WORDS,
+  TUFTING_WORDS,
+  type TuftingChoice,
+  type TuftLinesOf,
+} from './cushions/tufting-choice.ts';
 export { FULLNESS_RULES, type FullnessRule } from './cushions/tufting.ts';
 export * from './cushions/cushion-settings.ts';
 export * from './cushions/foam-grades.ts';

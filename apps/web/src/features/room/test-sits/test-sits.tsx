@@ -1,4 +1,12 @@
-import { foamBuild, sitsOn, testedBySits, testedOf, withTested, type Foam } from '@settlewright/geometry';
+import {
+  foamBuild,
+  isSame,
+  sitsOn,
+  testedBySits,
+  testedOf,
+  withTested,
+  type Foam,
+} from '@settlewright/geometry';
 import { Button } from '@/components/button.tsx';
 import { LoadingLine } from '@/components/loading.tsx';
 import { Notice } from '@/components/notice.tsx';
@@ -44,7 +52,7 @@ function KeptSits({ making, tested }: { making: Making; tested: Foam['tested'] }
   if (sits.isError)
     return <Notice tone="wont">The test sits could not be fetched: {sits.error.message}</Notice>;
   const found = testedBySits(seatCushion, sits.data);
-  const differs = JSON.stringify(found) !== JSON.stringify(tested);
+  const differs = !isSame(found, tested);
   const take = (next: Foam['tested']) =>
     changePiece((one) => {
       const { foam } = one.seatCushion;
