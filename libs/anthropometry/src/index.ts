@@ -15,6 +15,7 @@ export * from './checks/confidence.ts';
 export * from './checks/rule-conflicts.ts';
 export * from './checks/seat-sink.ts';
 export { calibrateSink, cushionDrop, SINK_ERROR, sinkBand, type TestSit } from './checks/sink-band.ts';
+export { isSureOfShort } from './checks/sure-of-short.ts';
 export { dropSourceWords } from './checks/cushion-drops.ts';
 export type { CheckInput } from './checks/check-input.ts';
 export { checkSet, checkSitter } from './checks/check-set.ts';

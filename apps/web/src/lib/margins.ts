@@ -1,4 +1,4 @@
-import type { RuleUnit, VerdictOutcome } from '@settlewright/anthropometry';
+import { isSureOfShort, type RuleUnit, type VerdictOutcome } from '@settlewright/anthropometry';
 import { formatAngle, formatLength, type LengthStyle } from '@settlewright/geometry';
 
 const INCH = 25.4;
@@ -38,14 +38,13 @@ function signed(text: string, value: number): string {
 /** The margin of a verdict; a stored sheet has lost those of people who were removed. */
 export type WithMargin = { margin: number | null; marginRange?: VerdictOutcome['marginRange'] | null };
 
-/** Short by no more than is shown, and sure of it: a range that hardly reaches over the line says nothing of room left. */
-const SURE_SHARE = 0.75;
+/** Short by no more than is shown, and sure of it. */
 export const isSurelyShort = (
   margin: number,
   half: number | undefined,
   unit: RuleUnit,
   style: LengthStyle,
-): boolean => isJustShort(margin, unit, style) && (half === undefined || -margin >= SURE_SHARE * half);
+): boolean => isJustShort(margin, unit, style) && isSureOfShort(margin, half ?? 0);
 
 /** Margin and half its range, rounded to what is known; no range where nothing was predicted. */
 export function knownMargin(

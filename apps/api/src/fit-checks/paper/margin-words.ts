@@ -1,15 +1,12 @@
 import type { LengthStyle } from '@settlewright/geometry';
 import { formatLength } from '@settlewright/geometry';
-import type { RuleUnit } from '@settlewright/anthropometry';
+import { isSureOfShort, type RuleUnit } from '@settlewright/anthropometry';
 
 /** From this half range on, a predicted margin is said in coarse steps. */
 const COARSE_FROM_MM = 19.05;
 /** A hair more than the tolerance within which a value is on its line. */
 const EQUAL_MM = 0.1 + 1e-9;
 const COARSE_STEP_MM = { millimetres: 10, 'feet-inches': 12.7, 'decimal-inches': 12.7 } as const;
-
-/** A range that hardly reaches over the line says nothing of room left. */
-const SURE_SHARE = 0.75;
 
 /** The margin before it says the unit already. */
 const UNIT_SIGN = /[\s\u202f]*(?:mm|[″°])$/u;
@@ -26,7 +23,7 @@ export function marginWords({ margin, marginRange }: Margin, unit: RuleUnit, sty
   const spread = half > 0 ? ` ± ${amount(half, half, unit, style).replace(UNIT_SIGN, '')}` : '';
   const words = amount(Math.abs(margin), half, unit, style);
   const isNone = words === amount(0, half, unit, style);
-  if (isNone && half <= -margin / SURE_SHARE && unit === 'mm' && margin < -EQUAL_MM) return 'just short';
+  if (isNone && unit === 'mm' && margin < -EQUAL_MM && isSureOfShort(margin, half)) return 'just short';
   return (isNone ? '' : margin < 0 ? '−' : '+') + words + spread;
 }
 
