@@ -1,4 +1,5 @@
 import type { OutlineCorner } from '../outlines/outline.ts';
+import type { Foam } from '../room/document.ts';
 import type { CushionEdge } from './cushion-choice.ts';
 import type { CushionGroup, CushionSpec } from './cushion-spec.ts';
 import { buttonSpots } from './cushion-warnings.ts';
@@ -23,7 +24,7 @@ function likeness(spec: CushionSpec, mirrored: boolean): string {
     make: { ...make, closureEdge: edge(make.closureEdge) },
     outline: fromLowest(mirrored ? mirroredOutline(spec.outline) : spec.outline),
     faults: spec.faults,
-    foam,
+    foam: foamName(foam),
     curve,
     tufting: spec.tufting,
     buttons,
@@ -76,6 +77,12 @@ export function isMirrorOfItself(spec: CushionSpec): boolean {
   };
   return onGrid(made) === onGrid(mirrored);
 }
+
+/** Shares and factors are no lengths: foams of another build-up, or another drop, are apart however near they lie. */
+const foamName = (foam: Foam): string =>
+  JSON.stringify(foam, (_key, value: unknown) =>
+    typeof value === 'number' ? Number(value.toPrecision(9)) : value,
+  );
 
 /** The same outline from its lowest corner on, the leftmost of those. */
 function fromLowest(corners: readonly OutlineCorner[]): OutlineCorner[] {

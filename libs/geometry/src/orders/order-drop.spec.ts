@@ -1,9 +1,11 @@
 import { seatSinkMm } from '@settlewright/anthropometry';
 import { describe, expect, it } from 'vitest';
+import type { CushionSpec } from '../cushions/cushion-spec.ts';
 import { deriveCushions } from '../cushions/derive-cushions.ts';
 import { measureSet } from '../situation/measure-set.ts';
 import { ARRANGEMENTS } from '../room/arrangements.ts';
 import type { Foam, SetDocument } from '../room/document.ts';
+import { orderModel } from './order-model.ts';
 import { ORDER_SITTERS, orderDrop, orderDropWords, shownDropMm } from './order-drop.ts';
 
 const INCHES = { system: 'feet-inches', roundTo: 16 } as const;
@@ -85,6 +87,29 @@ describe('how far a cushion on an order goes down', () => {
     };
     const tried = orderDrop(cushion({ ...verySoft, tested }))!;
     expect(orderDropWords(tried, INCHES)).toMatch(/The heavier would bottom out\.$/);
+  });
+
+  it('keeps cushions on sheets of their own where it differs, and buys their foam as one', () => {
+    const onFoams = (foams: readonly Foam[]) => {
+      const document = benchesOn(soft);
+      const benches = document.pieces.filter((piece) => piece.kind === 'bench');
+      benches.forEach((bench, n) => (bench.seatCushion = { foam: foams[n % 2]!, thicknessMm: 101.6 }));
+      const cushions = deriveCushions(document).filter(({ kind }) => kind === 'seat');
+      // Made alike but for the foam.
+      return orderModel({
+        cushions: cushions.map((spec) => ({ ...cushions[0]!, ...pick(spec) })),
+        covers: [],
+      });
+    };
+    const pick = ({ mark, key, foam }: CushionSpec) => ({ mark, key, foam });
+    const tested = (factor: number): Foam => ({
+      ...soft,
+      tested: { factor, error: 0.13, sits: 2, on: '2026-11-03', of },
+    });
+    expect(onFoams([tested(1.2), tested(1.2)]).schedule).toHaveLength(1);
+    const apart = onFoams([tested(1.15), tested(1.2)]);
+    expect(apart.schedule).toHaveLength(2);
+    expect(apart.totals.foam.map(({ marks }) => marks)).toEqual([['C1', 'C2']]);
   });
 
   it('is nothing for a back cushion', () => {

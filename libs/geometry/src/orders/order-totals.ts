@@ -83,7 +83,9 @@ function foamTotals(cushions: readonly CushionSpec[], grades: readonly FoamGrade
     const sawn = foamOfCushion(spec);
     if (!sawn || !spec.making) continue;
     const { thicknessMm } = spec.making.foam;
-    const key = JSON.stringify([spec.foam, Math.round(thicknessMm * 64)]);
+    // What was found of a foam by sitting on it is not bought.
+    const { tested: _, ...bought } = spec.foam;
+    const key = JSON.stringify([bought, Math.round(thicknessMm * 64)]);
     const grade = grades.find(({ name }) => name === spec.foam.grade);
     const total = totals.get(key) ?? {
       foam: spec.foam,
