@@ -62,6 +62,9 @@ describe('how far a seat goes down, on paper', () => {
       ),
     );
     expect(text).toMatch(/from the top 1″ of 22.lb on 3″ of 58.lb; ½″ of wrap over it, both faces together/);
+    expect(text.match(/crown up to \S+ more/g)).toEqual(
+      expect.arrayContaining(['crown up to ¼″ more', 'crown up to ¾″ more']),
+    );
     expect(text).toContain('(by 2 test sits, give or take 13 %)');
     expect(text).toContain('(estimate, give or take 30 %, from memory)');
   });
