@@ -63,7 +63,10 @@ function placeWords({ benchMark, kind, place }: CushionSpec): string {
 function specCushion(row: ScheduleRow, model: OrderModel, assumedCloths: readonly string[]): SpecCushion {
   const { spec, marks, benchMarks: benches, mirroredMarks: mirrorMarks } = row;
   const { making, make, buttons } = spec;
-  const board = making?.board && outlineExtent(making.board.outline);
+  const board = making?.board && {
+    ...outlineExtent(making.board.outline),
+    thicknessMm: making.board.thicknessMm,
+  };
   return {
     row,
     marks,

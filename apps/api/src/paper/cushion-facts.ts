@@ -159,7 +159,12 @@ function factsOf(cushion: SpecCushion, pack: SpecPack): Fact[] {
         ? `${count}, ${TUFTING_WORDS[spec.tufting.kind]}${words.buttons ? `, ${brief(words.buttons)}` : ''}; table on the button sheet`
         : 'none',
     ],
-    ['Board', board ? pairWords(board.widthMm, board.depthMm, units) : ''],
+    [
+      'Board',
+      board
+        ? `${pairWords(board.widthMm, board.depthMm, units)}, ${show(board.thicknessMm)} plywood, beyond the finished thickness`
+        : '',
+    ],
     ['Curve', cushion.curve ? curveWords(cushion.curve, units) : ''],
     ['Cover', coverWords(row.covers, words.cover && brief(words.cover))],
     ['Camera', camera.length > 0 ? `sees the ${camera.join(', ')}` : ''],

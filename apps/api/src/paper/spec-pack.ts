@@ -62,7 +62,7 @@ export interface SpecCushion {
   make: string;
   /** What is cut of the cover, every allowance included. */
   panels: readonly { name: string; count: number; widthMm: number; heightMm: number }[];
-  board?: { widthMm: number; depthMm: number };
+  board?: Size;
   /** Along one edge and round both its ends. */
   closure: { word: string; edge: CushionEdge; edgeMm: number; wrapMm: number };
   weltMm: number;

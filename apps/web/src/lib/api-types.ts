@@ -2929,6 +2929,8 @@ export interface components {
                 boardSmaller?: number;
                 /** @description tight boxing cut higher than the foam, seams included; 6.35 mm as usual */
                 tightBoxing?: number;
+                /** @description plywood of the board; 9.524999999999999 mm as usual */
+                boardThickness?: number;
                 /** @description foam larger than its board, on every side; 9.524999999999999 mm as usual */
                 boardFoamOver?: number;
                 /** @description cover pulled round and stapled under the board; 63.5 mm as usual */
@@ -4266,9 +4268,6 @@ export interface components {
             outline: components["schemas"]["OutlineCornerDto"][];
             thicknessMm: number;
         };
-        CutBoardDto: {
-            outline: components["schemas"]["OutlineCornerDto"][];
-        };
         CushionClosureDto: {
             edgeMm: number;
             wrapMm: number;
@@ -4283,7 +4282,7 @@ export interface components {
         CushionPanelsDto: {
             panels: components["schemas"]["CutPanelDto"][];
             foam: components["schemas"]["CutSlabDto"];
-            board?: components["schemas"]["CutBoardDto"];
+            board?: components["schemas"]["CutSlabDto"];
             perimeterMm: number;
             edgeHeightMm: number;
             closure: components["schemas"]["CushionClosureDto"];
@@ -4291,9 +4290,12 @@ export interface components {
         };
         CushionWarningDto: {
             /** @enum {string} */
-            code: "off-joint" | "buttons-outside" | "beyond-place" | "closure-on-camera-side";
+            code: "off-joint" | "buttons-outside" | "beyond-place" | "board-beyond" | "closure-on-camera-side";
             columns?: number;
             furthestMm?: number;
+            /** @enum {string} */
+            kind?: "seat" | "back";
+            boardMm?: number;
             count?: number;
             /** @enum {string} */
             edge?: "back" | "front" | "left" | "right";

@@ -200,6 +200,15 @@ describe('tufting', () => {
     expect(outside).toMatchObject({ count: expect.any(Number) as number });
   });
 
+  it('says of a board that it stands over the thickness, or before the back', () => {
+    const make = { ...PLAIN_MAKE, construction: 'plywood-backed', closure: 'stapled', welt: 'none' } as const;
+    const [seat, back] = (['seat', 'back'] as const).map((kind) =>
+      chosen('bench-window', kind, { make }).spec.warnings.map((one) => cushionWarningWords(one, INCHES)),
+    );
+    expect(seat).toContain('The board under it, ⅜″, is not in the seat height: set the deck lower by it.');
+    expect(back).toContain('The board behind it, ⅜″, is not in the thickness: it brings the back forward.');
+  });
+
   it('keeps buttons on their boards whatever outline is drawn round them', () => {
     const plain = chosen('bench-window', 'back', {}).spec;
     const { widthMm, depthMm } = plain.finishedMm;

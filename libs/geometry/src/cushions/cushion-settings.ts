@@ -34,6 +34,7 @@ export const CUSHION_SETTINGS = {
   clothWidth: inches(54, 'width of the cloth', 'published source'),
   boardSmaller: inches(1 / 2, 'board smaller than finished, in width and in depth', 'from memory'),
   tightBoxing: inches(1 / 4, 'tight boxing cut higher than the foam, seams included', 'published source'),
+  boardThickness: inches(3 / 8, 'plywood of the board', 'from memory'),
   boardFoamOver: inches(3 / 8, 'foam larger than its board, on every side', 'published source'),
   pull: inches(5 / 2, 'cover pulled round and stapled under the board', 'published source'),
   buttonPull: inches(3 / 8, 'how far a button without fullness is pulled in', 'from memory'),

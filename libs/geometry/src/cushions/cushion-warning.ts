@@ -6,4 +6,6 @@ export type CushionWarning =
   | { code: 'buttons-outside'; count: number }
   /** A drawn outline goes further than the size that fits its place. */
   | { code: 'beyond-place'; edges: CushionEdge[]; furthestMm: number }
+  /** A board stands under the foam, or behind that of a back, over the thickness that the room counts with. */
+  | { code: 'board-beyond'; kind: 'seat' | 'back'; boardMm: number }
   | { code: 'closure-on-camera-side'; edge: CushionEdge };

@@ -27,7 +27,10 @@ export function buttonSpots(spec: Pick<CushionSpec, 'buttons' | 'datum' | 'place
  * @returns warnings as data; see `cushionWarningWords`
  */
 export function cushionWarnings(
-  spec: Pick<CushionSpec, 'buttons' | 'datum' | 'placeMm' | 'gapsMm' | 'outline' | 'make' | 'cameraSides'> & {
+  spec: Pick<
+    CushionSpec,
+    'buttons' | 'datum' | 'placeMm' | 'gapsMm' | 'outline' | 'make' | 'making' | 'kind' | 'cameraSides'
+  > & {
     /** Whether columns are meant to stand on joints. */
     onJoints: boolean;
     /** Whether the outline was drawn freely; a taper that goes out is meant to. */
@@ -40,6 +43,9 @@ export function cushionWarnings(
   return [
     ...(spec.onJoints ? offJoint(spec.buttons) : []),
     ...(outside > 0 ? [{ code: 'buttons-outside' as const, count: outside }] : []),
+    ...(spec.making?.board
+      ? [{ code: 'board-beyond' as const, kind: spec.kind, boardMm: spec.making.board.thicknessMm }]
+      : []),
     ...(spec.drawn ? beyondPlace(spec) : []),
     ...(open && cameraSides.includes(open) ? [{ code: 'closure-on-camera-side' as const, edge: open }] : []),
   ];
@@ -104,6 +110,10 @@ export function cushionWarningWords(warning: CushionWarning, style: LengthStyle)
       const where = warning.edges.map((edge) => `the ${edge}`).join(' and ');
       return `The drawn outline goes ${show(warning.furthestMm)} beyond its place at ${where}.`;
     }
+    case 'board-beyond':
+      return warning.kind === 'seat'
+        ? `The board under it, ${show(warning.boardMm)}, is not in the seat height: set the deck lower by it.`
+        : `The board behind it, ${show(warning.boardMm)}, is not in the thickness: it brings the back forward.`;
     case 'closure-on-camera-side':
       return `The closure is in the ${warning.edge} edge, which the camera sees.`;
   }

@@ -13,6 +13,7 @@ const LIMITS: Partial<Record<AllowanceKey, readonly [number, number]>> = {
   clothWidth: [300, 3500],
   weltStrip: [10, 150],
   seam: [3, 60],
+  boardThickness: [3, 40],
   wrapLost: [0, MM_PER_INCH],
 };
 

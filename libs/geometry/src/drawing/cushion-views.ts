@@ -6,7 +6,6 @@ import { drawingOf, type Drawing, type DrawShape, type PagePoint } from './drawi
 /** Sizes of what is drawn but not measured, millimetres of the real thing. */
 export const WELT_MM = 8;
 const CROWN_MM = 6.35;
-const BOARD_MM = 9.5;
 const DECK_MM = 18;
 
 /** A rectangle by two opposite corners. */
@@ -118,7 +117,7 @@ export function cushionSection(spec: CushionSpec): Drawing {
   const outline = cutOutline(construction, d, t);
   const board = spec.making?.board;
   const inset = board ? (d - outlineExtent(board.outline).depthMm) / 2 : 0;
-  const boardMm = board ? BOARD_MM : 0;
+  const boardMm = board?.thicknessMm ?? 0;
   const under = spec.kind === 'seat' ? 'deck' : 'back boards';
   const leader = (y: number, text: string): DrawShape[] => [
     {

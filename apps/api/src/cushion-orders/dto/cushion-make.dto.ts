@@ -51,11 +51,6 @@ export class CutSlabDto {
   thicknessMm: number;
 }
 
-export class CutBoardDto {
-  @ApiProperty({ type: [OutlineCornerDto] })
-  outline: OutlineCornerDto[];
-}
-
 export class CushionClosureDto {
   @ApiProperty()
   edgeMm: number;
@@ -81,8 +76,8 @@ export class CushionPanelsDto implements CushionPanels {
   panels: CutPanelDto[];
   @ApiProperty({ type: CutSlabDto })
   foam: CutSlabDto;
-  @ApiPropertyOptional({ type: CutBoardDto })
-  board?: CutBoardDto;
+  @ApiPropertyOptional({ type: CutSlabDto })
+  board?: CutSlabDto;
   @ApiProperty()
   perimeterMm: number;
   @ApiProperty()
@@ -121,12 +116,18 @@ export class CushionTuftingDto {
 
 /** Something to look at before a cushion is made; which numbers it has follows from its code. */
 export class CushionWarningDto {
-  @ApiProperty({ enum: ['off-joint', 'buttons-outside', 'beyond-place', 'closure-on-camera-side'] })
+  @ApiProperty({
+    enum: ['off-joint', 'buttons-outside', 'beyond-place', 'board-beyond', 'closure-on-camera-side'],
+  })
   code: CushionSpec['warnings'][number]['code'];
   @ApiPropertyOptional()
   columns?: number;
   @ApiPropertyOptional()
   furthestMm?: number;
+  @ApiPropertyOptional({ enum: ['seat', 'back'] })
+  kind?: 'seat' | 'back';
+  @ApiPropertyOptional()
+  boardMm?: number;
   @ApiPropertyOptional()
   count?: number;
   @ApiPropertyOptional({ enum: CUSHION_EDGES })

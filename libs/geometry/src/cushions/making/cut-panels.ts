@@ -23,8 +23,8 @@ export interface CutSlab {
 export interface CushionPanels {
   panels: CutPanel[];
   foam: CutSlab;
-  /** Plywood, where the cushion has one. */
-  board?: { outline: OutlineCorner[] };
+  /** Plywood under the foam, where the cushion has one; the finished thickness is without it. */
+  board?: CutSlab;
   /** Round the plan, seam to seam. */
   perimeterMm: number;
   /** Height of the edge between its seams, or 0 where both plates meet in one seam. */

@@ -158,6 +158,7 @@ describe('other makes', () => {
   it('pulls the cover of a board round foam that stands over it, and staples it', () => {
     const one = made([inch(40), inch(20), inch(2)], { construction: 'plywood-backed', closure: 'stapled' });
     expect(inInches(one.board!.outline)).toEqual([39.5, 19.5]);
+    expect(one.board!.thicknessMm).toBeCloseTo(inch(3 / 8), 9);
     expect(inInches(one.foam.outline)).toEqual([40.25, 20.25]);
     expect(inInches(one.panel('cover').cut)).toEqual([40.25 + 2 * (2 + 2.5), 20.25 + 2 * (2 + 2.5)]);
     expect(one.welt.lengthMm).toBe(0);

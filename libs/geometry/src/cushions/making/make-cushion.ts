@@ -115,7 +115,7 @@ function panelsOf(
       return {
         ...base,
         foam: { outline: over, thicknessMm },
-        board: { outline: board },
+        board: { outline: board, thicknessMm: settings.boardThickness.valueMm },
         edgeHeightMm: thicknessMm,
         closure: { edgeMm: 0, wrapMm: 0, lengthMm: 0 },
         panels: [cover],

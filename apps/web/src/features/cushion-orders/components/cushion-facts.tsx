@@ -56,6 +56,7 @@ export function CushionFacts({ spec, words, covers }: CushionFactsProps) {
   const { making, make, foam, buttons } = spec;
   const sawn = making && outlineExtent(making.foam.outline);
   const closed = making?.closure;
+  const board = making?.board && { ...outlineExtent(making.board.outline), ...making.board };
   const drop = orderDrop(spec);
   const built = phraseText(buildPhrase(foam, spec.finishedMm.thicknessMm), format.style);
   const show = (mm: number) => <Measure text={format.length(mm)} />;
@@ -90,6 +91,12 @@ export function CushionFacts({ spec, words, covers }: CushionFactsProps) {
               </Fragment>
             );
           })}
+        </Row>
+      )}
+      {board && (
+        <Row name="Board">
+          {show(board.widthMm)} × {show(board.depthMm)}, {show(board.thicknessMm)} plywood, beyond the
+          finished thickness
         </Row>
       )}
       <Cover spec={spec} words={words} covers={covers} />
