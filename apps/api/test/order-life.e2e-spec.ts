@@ -249,6 +249,25 @@ describe('the life of a cushion order', () => {
     });
   });
 
+  it('says on its paper what is new since it was sent before', async () => {
+    const order = await orders.send();
+    const text = async () => {
+      const { body } = await as(test, null)
+        .get(`/link/${order.token}/spec.pdf?units=feet-inches`)
+        .responseType('blob')
+        .expect(200);
+      return (await paperText(body as Buffer)).replace(/\s+/g, ' ');
+    };
+    expect(await text()).not.toContain('Since A');
+    await as(test, owner)
+      .patch(order.path)
+      .send({ spec: { cover: 'green cord' } })
+      .expect(200);
+    await byShop(order, 'send', { upholstererId: order.upholstererId });
+    expect(await text()).toContain('Since A');
+    expect(await text()).toContain('cover: green cord, was plum moquette');
+  });
+
   describe('the cloths of an order', () => {
     const CLOTH = {
       ...{ name: 'plum moquette', widthMm: 1400, selvedgeMm: 10, direction: 'up-roll', nap: 'to-the-front' },

@@ -15,10 +15,13 @@ import { WorkshopsService } from '../workshops/workshops.service';
 import { dayInWords, momentInWords } from './day-in-words';
 import type { CushionOrder } from './entities/cushion-order.entity';
 import { IssuedSets } from './issued-sets.service';
+import { changesOnPaper } from './changes-on-paper';
+import { orderChanges, type Sending } from './life/order-changes';
 import { markedSections } from './marked-sections';
-import { coversOf, type OrderContent, toleranceOf } from './order-content';
+import { coversOf, type OrderContent, sameContent, toleranceOf } from './order-content';
 import type { PackQuery } from './dto/pack-query.dto';
 import { packStyle } from './pack-style';
+import { SentCushions } from './sent-cushions.service';
 import { bagLabels, specCushions } from './spec-cushions';
 
 /** Room for a mark that moves off its cushion. */
@@ -31,6 +34,7 @@ export class OrderPaper {
     private readonly issued: IssuedSets,
     private readonly productions: ProductionsService,
     private readonly workshops: WorkshopsService,
+    private readonly sentCushions: SentCushions,
     private readonly press: SpecPress,
     @InjectSettings() private readonly config: Settings,
   ) {}
@@ -53,8 +57,9 @@ export class OrderPaper {
     const covers = said.length > 0 ? said : assumedCovers(content);
     const assumedCloths = said.length > 0 ? [] : covers.map(({ name }) => name);
     const model = orderModel({ cushions, covers, rules: issued.cushionRules });
+    const style = packStyle(order, production, workshop, wanted);
     return {
-      ...packStyle(order, production, workshop, wanted),
+      ...style,
       production: production.name,
       set: order.set?.name ?? '',
       workshop: { name: workshop.name, telephone: workshop.telephone },
@@ -72,6 +77,7 @@ export class OrderPaper {
         issuedBy: issued.issuedByName,
         note: issued.note,
       },
+      since: await this.since(order, { content, cushions }, style.units),
       words: content.spec,
       toleranceMm: toleranceOf(content),
       model,
@@ -82,6 +88,19 @@ export class OrderPaper {
       picture: pictureFromAbove(issued.document, new Set(cushions.map(({ benchId }) => benchId))),
       sections: markedSections(issued.document, cushions),
     };
+  }
+
+  /** Beside what its upholsterer was sent before; an order that was changed since stands beside what was sent last. */
+  private async since(
+    order: CushionOrder,
+    now: Sending,
+    units: SpecPackData['units'],
+  ): Promise<SpecPackData['since']> {
+    const { sent, sentBefore } = order;
+    const earlier = sent && !sameContent(sent, now.content) ? sent : sentBefore;
+    if (earlier === null) return null;
+    const before = { content: earlier, cushions: await this.sentCushions.of(order, earlier) };
+    return { letter: earlier.revisionLetter, changes: changesOnPaper(orderChanges(before, now), units) };
   }
 }
 

@@ -183,6 +183,7 @@ function orderFacts(pack: SpecPack): Fact[] {
   const rows: [string, string][] = [
     ['NOT as asked', model.faults.map(({ mark, text }) => (mark ? `${mark}: ${text}` : text)).join('; ')],
     ['Revision', pack.revision.note],
+    [`Since ${pack.since?.letter}`, pack.since?.changes ?? ''],
     ['Flammability', flammability],
     ['Cover', [...cloths, words.cover].filter(Boolean).join('; ')],
     ['Wear, ageing, notes', [words.notes, ...notes].filter(Boolean).join(' ')],

@@ -116,6 +116,8 @@ export interface SpecPackData {
     pageUrl: string;
   };
   revision: { letter: string; issuedAt: Date; issuedOn: string; issuedBy: string; note: string };
+  /** What reads otherwise than in what its upholsterer had before. */
+  since: { letter: string; changes: string } | null;
   words: SpecWords;
   /** How far a finished size may be off. */
   toleranceMm: number;

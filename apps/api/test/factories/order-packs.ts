@@ -115,6 +115,7 @@ export function orderPack(
       issuedBy: 'Nell Abara',
       note: 'zip longer',
     },
+    since: { letter: 'B', changes: 'C1 notes: =Rub the front edge., was nothing' },
     words: {
       cover: 'plum moquette, supplied',
       foam: 'bonded polyester wrap',

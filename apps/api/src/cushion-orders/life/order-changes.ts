@@ -36,7 +36,7 @@ export interface OrderChange {
   outlines?: { before: OutlineCorner[]; after: OutlineCorner[] };
 }
 
-interface Sending {
+export interface Sending {
   content: OrderContent;
   cushions: readonly CushionSpec[];
 }
