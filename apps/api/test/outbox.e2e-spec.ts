@@ -7,9 +7,10 @@ import { OutboxAttachment } from '../src/mail/entities/outbox-attachment.entity'
 import { OutboxMail } from '../src/mail/entities/outbox-mail.entity';
 import { MailService } from '../src/mail/mail.service';
 import { OutboxWorker } from '../src/mail/outbox-worker';
+import { ApiProcess, freePort } from './factories/stand-ins';
 import { startTestApp, type TestApp } from './test-app';
 
-type Answer = Error | 'break-the-line' | null;
+type Answer = Error | 'break-the-line' | 'say-nothing' | null;
 
 /** A mail server on this machine that answers as it is told. */
 class FakeMailServer {
@@ -24,7 +25,7 @@ class FakeMailServer {
           const answer = this.answers.shift() ?? null;
           if (!(answer instanceof Error)) this.received.push(mail);
           if (answer === 'break-the-line') this.breakLine(session.id);
-          else done(answer ?? undefined);
+          else if (answer !== 'say-nothing') done(answer ?? undefined);
         })
         .catch(done);
     };
@@ -72,6 +73,11 @@ const MAIL = { to: 'upholsterer@cushions.test', subject: 'Order 7', text: 'Eleve
 
 const enqueue = (more: Partial<Parameters<MailService['enqueue']>[1]> = {}) =>
   test.dataSource.transaction((manager) => test.app.get(MailService).enqueue(manager, { ...MAIL, ...more }));
+async function until(isSo: () => boolean): Promise<void> {
+  const patience = Date.now() + 10_000;
+  while (!isSo() && Date.now() < patience) await wait(20);
+  expect(isSo()).toBe(true);
+}
 const read = (id: string) => test.dataSource.manager.findOneByOrFail(OutboxMail, { id });
 const makeDue = () => test.dataSource.query(`UPDATE outbox_mails SET next_attempt_at = now()`);
 
@@ -176,6 +182,21 @@ describe('a mail in the outbox', () => {
     expect(await mails.sendAgain(test.dataSource.manager, queued.id)).toBe(false);
   });
 
+  it('is never sent twice by itself when the process is killed after handing it over', async () => {
+    server.answers = ['say-nothing'];
+    const api = await ApiProcess.start(test.settings, await freePort());
+    const queued = await enqueue();
+    await until(() => server.received.length > 0);
+    await api.kill();
+    expect(await read(queued.id)).toMatchObject({ state: 'sending', attempts: 1, text: MAIL.text });
+    expect(await worker.sendDue()).toBe(0);
+    // The clock alone is moved: after ten minutes whoever held it has ended.
+    await test.dataSource.query(`UPDATE outbox_mails SET sending_at = sending_at - interval '11 minutes'`);
+    expect(await worker.sendDue()).toBe(0);
+    expect(await read(queued.id)).toMatchObject({ state: 'perhaps-sent', text: MAIL.text });
+    expect(server.received.map(({ messageId }) => messageId)).toEqual([queued.messageId]);
+  });
+
   it('is left alone while another process is sending it', async () => {
     const queued = await enqueue();
     await test.dataSource.query(`UPDATE outbox_mails SET state = 'sending', sending_at = now()`);
@@ -196,8 +217,6 @@ describe('a mail in the outbox', () => {
 it('sends without being asked while the application runs, and stops with it', async () => {
   const running = await startTestApp({ smtpUrl: test.settings.smtpUrl, mailPollMs: 20 }, '_running');
   await running.app.get(MailService).enqueue(running.dataSource.manager, MAIL);
-  const patience = Date.now() + 10_000;
-  while (server.received.length === 0 && Date.now() < patience) await wait(20);
-  expect(server.received).toHaveLength(1);
+  await until(() => server.received.length > 0);
   await running.close();
 });

@@ -72,6 +72,8 @@ export class ApiProcess {
         HOST: '127.0.0.1',
         PUBLIC_URL: settings.publicUrl,
         JWT_SECRET: settings.jwtSecret,
+        SMTP_URL: settings.smtpUrl,
+        MAIL_FROM: settings.mailFrom,
         LOG_LEVEL: 'silent',
         ...(payments && {
           STRIPE_SECRET_KEY: payments.secretKey,
