@@ -82,7 +82,7 @@ describe('a cushion order from the question to the inspection', () => {
       .setInputFiles({ name: 'cloth.png', mimeType: 'image/png', buffer: PIXEL });
     await files.getByText('cloth.jpg').first().waitFor();
     await shop.reload();
-    await shop.getByText('1 question open').waitFor();
+    await shop.getByText('1 unanswered').waitFor();
     await shop.getByLabel('Answer', { exact: true }).fill('The window side.');
     await press(shop, 'Answer the question');
     await shop.getByText('answered', { exact: true }).waitFor();

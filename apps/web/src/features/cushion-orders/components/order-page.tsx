@@ -83,11 +83,7 @@ function Opened({ path, order }: { path: OrderPath; order: Order }) {
             see the same.
           </span>
         )}
-        {order.openQuestions > 0 && (
-          <span className="text-tight">
-            {order.openQuestions} {order.openQuestions === 1 ? 'question' : 'questions'} open
-          </span>
-        )}
+        {order.openQuestions > 0 && <span className="text-tight">{order.openQuestions} unanswered</span>}
         {canEdit &&
           next.map((state) => (
             <button key={state} type="button" className="link min-h-8" onClick={() => setDialog(state)}>

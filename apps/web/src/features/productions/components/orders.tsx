@@ -50,9 +50,7 @@ function OrderCard({ order, home }: { order: OrderSummary; home: string }) {
       <p className="text-sm text-ink-2">{order.upholsterer?.name ?? 'no upholsterer chosen yet'}</p>
       {order.openQuestions > 0 && (
         <p className="mt-1 text-sm font-medium text-tight">
-          <Flag>
-            {order.openQuestions} {order.openQuestions === 1 ? 'question' : 'questions'} open
-          </Flag>
+          <Flag>{order.openQuestions} unanswered</Flag>
         </p>
       )}
     </li>
