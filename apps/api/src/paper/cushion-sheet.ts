@@ -31,8 +31,6 @@ const WRAPPED: ReadonlySet<Construction> = new Set(['waterfall', 'bullnose']);
 const FOOT_MM = 44;
 const HEAD_MM = 12;
 const SUM_SIZE = 9.5;
-/** What foam in an oversize swells over its boxing, from memory; a wrap comes over it. */
-const CROWN_MM = 6.35;
 
 /** One sheet for cushions that are made alike, and a second where their facts find no room on it. */
 export function drawCushionSheet(pages: OrderPages, pack: SpecPack, cushion: SpecCushion): void {
@@ -148,7 +146,7 @@ function planOf(cushion: SpecCushion, { units }: SpecPack): CushionPlan {
 /** What the view from the front says of its edge. */
 function frontWords({ row: { spec }, finished }: SpecCushion, { units }: SpecPack): string {
   const show = (mm: number) => formatLength(mm, { ...units, feet: false });
-  const crown = `crown up to ${show(CROWN_MM + (spec.foam.wrap?.thicknessMm ?? 0))} more`;
+  const crown = `crown up to ${show((spec.making?.crownMm ?? 0) + (spec.foam.wrap?.thicknessMm ?? 0))} more`;
   const strip = show(spec.making?.edgeHeightMm ?? finished.thicknessMm);
   const words: Record<Construction, string> = {
     boxed: `boxing ${strip} between seams; ${crown}`,

@@ -2925,6 +2925,10 @@ export interface components {
                 weltStrip?: number;
                 /** @description width of the cloth; 1371.6 mm as usual */
                 clothWidth?: number;
+                /** @description most that a cushion crowns over its edges; 6.35 mm as usual */
+                crown?: number;
+                /** @description cut larger at each side of a knife edge for each inch it is thick; 12.7 mm as usual */
+                knifeCrown?: number;
                 /** @description board smaller than finished, in width and in depth; 12.7 mm as usual */
                 boardSmaller?: number;
                 /** @description tight boxing cut higher than the foam, seams included; 6.35 mm as usual */
@@ -4285,6 +4289,7 @@ export interface components {
             board?: components["schemas"]["CutSlabDto"];
             perimeterMm: number;
             edgeHeightMm: number;
+            crownMm: number;
             closure: components["schemas"]["CushionClosureDto"];
             welt: components["schemas"]["CushionWeltDto"];
         };

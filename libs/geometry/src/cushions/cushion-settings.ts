@@ -32,6 +32,12 @@ export const CUSHION_SETTINGS = {
   weltJoin: inches(3, 'welt added for the join of each seam', 'shop rule'),
   weltStrip: inches(3 / 2, 'width of the welt strip', 'published source'),
   clothWidth: inches(54, 'width of the cloth', 'published source'),
+  crown: inches(1 / 4, 'most that a cushion crowns over its edges', 'from memory'),
+  knifeCrown: inches(
+    1 / 2,
+    'cut larger at each side of a knife edge for each inch it is thick',
+    'from memory',
+  ),
   boardSmaller: inches(1 / 2, 'board smaller than finished, in width and in depth', 'from memory'),
   tightBoxing: inches(1 / 4, 'tight boxing cut higher than the foam, seams included', 'published source'),
   boardThickness: inches(3 / 8, 'plywood of the board', 'from memory'),
@@ -41,12 +47,6 @@ export const CUSHION_SETTINGS = {
   wrapLost: inches(1 / 2, 'lost of each inch of wrap under a sitter', 'from memory'),
   buttonToEdge: inches(4, 'least distance of a button from the edge', 'from memory'),
 } as const satisfies Record<string, CushionSetting>;
-
-/** Part of the thickness that a knife edge gets at every side for the crown of the foam. */
-export const KNIFE_EDGE_CROWN = { share: 1 / 2, source: 'from memory' } as const satisfies {
-  share: number;
-  source: SettingSource;
-};
 
 /** The allowances a set of cushions is made with. */
 export type CushionSettings = Record<keyof typeof CUSHION_SETTINGS, CushionSetting>;

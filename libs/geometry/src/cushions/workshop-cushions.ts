@@ -15,6 +15,7 @@ const LIMITS: Partial<Record<AllowanceKey, readonly [number, number]>> = {
   seam: [3, 60],
   boardThickness: [3, 40],
   wrapLost: [0, MM_PER_INCH],
+  knifeCrown: [0, MM_PER_INCH],
 };
 
 /**

@@ -82,6 +82,8 @@ export class CushionPanelsDto implements CushionPanels {
   perimeterMm: number;
   @ApiProperty()
   edgeHeightMm: number;
+  @ApiProperty()
+  crownMm: number;
   @ApiProperty({ type: CushionClosureDto })
   closure: CushionClosureDto;
   @ApiProperty({ type: CushionWeltDto })

@@ -29,6 +29,8 @@ export interface CushionPanels {
   perimeterMm: number;
   /** Height of the edge between its seams, or 0 where both plates meet in one seam. */
   edgeHeightMm: number;
+  /** Most that its middle stands over its edges, without what a wrap adds. */
+  crownMm: number;
   /** The closure along the plan's edge: the edge, what goes round each end, and both together. */
   closure: { edgeMm: number; wrapMm: number; lengthMm: number };
   welt: { seams: number; alongSeamsMm: number; joinsMm: number; lengthMm: number };

@@ -1,6 +1,7 @@
 import fc from 'fast-check';
 import { describe, expect, it } from 'vitest';
 import { outlineArea, outlineExtent, outlinePerimeter, type OutlineCorner } from '../../outlines/outline.ts';
+import { CUSHION_SETTINGS } from '../cushion-settings.ts';
 import type { CushionShape } from '../cushion-shape.ts';
 import { PLAIN_MAKE, type CushionMake } from './cushion-make.ts';
 import { makeCushion } from './make-cushion.ts';
@@ -132,6 +133,16 @@ describe('other makes', () => {
     expect(inInches(one.panel('plate').cut)).toEqual([25, 25]);
     expect(one.welt.seams).toBe(1);
     expect(one.closure.lengthMm).toBeCloseTo(inch(20), 6);
+    const flatter = {
+      ...CUSHION_SETTINGS,
+      knifeCrown: { ...CUSHION_SETTINGS.knifeCrown, valueMm: inch(1 / 4) },
+    };
+    const asked = {
+      finishedMm: { widthMm: inch(20), depthMm: inch(20), thicknessMm: inch(4) },
+      make: { ...PLAIN_MAKE, construction: 'knife-edge' as const },
+    };
+    const own = makeCushion(asked, flatter);
+    expect(own.ok && inInches(own.made.panels[0]!.cut)).toEqual([23, 23]);
   });
 
   // Published course: top + front + bottom + 1 by width + 1; sides + 1.

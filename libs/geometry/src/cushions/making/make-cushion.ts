@@ -5,7 +5,8 @@ import {
   outlinePerimeter,
   type OutlineCorner,
 } from '../../outlines/outline.ts';
-import { CUSHION_SETTINGS, KNIFE_EDGE_CROWN, type CushionSettings } from '../cushion-settings.ts';
+import { MM_PER_INCH } from '../../units/length-style.ts';
+import { CUSHION_SETTINGS, type CushionSettings } from '../cushion-settings.ts';
 import { shapedOutline, type CushionShape } from '../cushion-shape.ts';
 import { zipPanel, type CushionSize } from '../cushion-sizes.ts';
 import { CONSTRUCTION_WORDS, type CushionMake } from './cushion-make.ts';
@@ -74,7 +75,7 @@ function panelsOf(
     cut: offsetOutline(plan, seam + extra),
     marksMm: [],
   });
-  const base = { foam, perimeterMm, closure: closed };
+  const base = { foam, perimeterMm, closure: closed, crownMm: settings.crown.valueMm };
   switch (make.construction) {
     case 'boxed':
     case 'tight-boxed': {
@@ -93,7 +94,7 @@ function panelsOf(
       };
     }
     case 'knife-edge': {
-      const crown = thicknessMm * KNIFE_EDGE_CROWN.share;
+      const crown = (thicknessMm * settings.knifeCrown.valueMm) / MM_PER_INCH;
       return {
         ...base,
         edgeHeightMm: 0,
