@@ -1,5 +1,4 @@
 import { CUSHION_SETTINGS, type CushionSettings } from './cushion-settings.ts';
-import type { CushionSpec } from './cushion-spec.ts';
 
 /** Width along the seat, depth from back to front (height of a back cushion), thickness. */
 export interface CushionSize {
@@ -8,12 +7,20 @@ export interface CushionSize {
   thicknessMm: number;
 }
 
+/** Where a cushion lies. */
+export interface CushionPlace {
+  /** Wood to wood. */
+  placeMm: CushionSize;
+  /** Taken off the place at each edge. */
+  gapsMm: { back: number; front: number; left: number; right: number };
+}
+
 /**
  * The size that fits a place, seam to seam: never below a millimetre.
  *
- * @param spec - place, wood to wood, and what each edge takes off it
+ * @param place - wood to wood, and what each edge takes off it
  */
-export function fittingSize({ placeMm, gapsMm }: Pick<CushionSpec, 'placeMm' | 'gapsMm'>): CushionSize {
+export function fittingSize({ placeMm, gapsMm }: CushionPlace): CushionSize {
   return {
     widthMm: Math.max(1, placeMm.widthMm - gapsMm.left - gapsMm.right),
     depthMm: Math.max(1, placeMm.depthMm - gapsMm.back - gapsMm.front),

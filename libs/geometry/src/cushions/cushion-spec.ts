@@ -1,7 +1,7 @@
 import type { OutlineCorner } from '../outlines/outline.ts';
 import type { Foam } from '../room/document.ts';
 import type { CushionEdge, HoldDown } from './cushion-choice.ts';
-import type { CushionSize } from './cushion-sizes.ts';
+import type { CushionPlace, CushionSize } from './cushion-sizes.ts';
 import type { CushionWarning } from './cushion-warning.ts';
 import type { CushionMake } from './making/cushion-make.ts';
 import type { CushionPanels } from './making/cut-panels.ts';
@@ -88,7 +88,7 @@ export interface CushionTufting {
 }
 
 /** One cushion to be made. */
-export interface CushionSpec {
+export interface CushionSpec extends CushionPlace {
   /** C1, C2 …: all seats in the order of the pieces, then all backs. */
   mark: string;
   /** Stable while the piece keeps its division: `${pieceId}/${kind}-${n}`. */
@@ -102,10 +102,6 @@ export interface CushionSpec {
   hand: 'left' | 'right' | 'either';
   /** Left and right as the sitter sees them. Of a back cushion `back` is the top and `front` the bottom edge. */
   edges: { back: EdgeMeets; front: EdgeMeets; left: EdgeMeets; right: EdgeMeets };
-  /** Wood to wood. */
-  placeMm: CushionSize;
-  /** Taken off the place at each edge. */
-  gapsMm: { back: number; front: number; left: number; right: number };
   /** Seam to seam; the size that governs. Of a shape that is no rectangle: what it stands in. */
   finishedMm: CushionSize;
   make: CushionMake;
