@@ -1,7 +1,6 @@
-import { type LengthStyle, lengthStep, type OutlineCorner } from '@settlewright/geometry';
+import { type LengthStyle, lengthStep, outlineBox, type OutlineCorner } from '@settlewright/geometry';
 import { type OrderPage, type OrderPages, PAD } from './order-pages';
 import { type Column, drawHead, drawRow } from './ruled-table';
-import { planBox } from './plan-place';
 import { bareLength } from './spec-words';
 
 const ROW_MM = 4.9;
@@ -25,7 +24,7 @@ export function drawCornerTables(
   outline: readonly OutlineCorner[],
   units: LengthStyle,
 ): void {
-  const { x0, y0 } = planBox({ outline });
+  const { x0, y0 } = outlineBox(outline);
   const step = lengthStep(units);
   const show = (mm: number) => bareLength(Math.round(mm / step) * step, units);
   const rows = outline.map(({ at, radiusMm }, i) => [

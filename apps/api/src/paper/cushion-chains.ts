@@ -1,6 +1,7 @@
+import { outlineBox } from '@settlewright/geometry';
 import { type Chain, chainDepth, chainWidth, drawChain } from './dimension-chain';
 import { outlineStops } from './outline-stops';
-import { chainSide, type CushionPlan, planBox, type PlanPlace } from './plan-place';
+import { chainSide, type CushionPlan, type PlanPlace } from './plan-place';
 import { PEN, type Sheet } from './sheet';
 
 const FIRST_LEVEL_MM = 4.6;
@@ -31,7 +32,7 @@ export function spaces(stops: readonly number[], stepMm: number): number[] {
 /** Lays the chains out from the outline outwards: its corners, then its buttons, then the whole. */
 export function planChains(sheet: Sheet, plan: CushionPlan, place: PlanPlace): PlanChains {
   const { x, y, factor, format } = place;
-  const box = planBox(plan);
+  const box = outlineBox(plan.outline);
   const bare = bareOf(format);
   const level = (mm: number) => x + (mm - box.x0) * factor;
   const down = (mm: number) => y + (box.y1 - mm) * factor;
@@ -128,7 +129,7 @@ export function drawChains(sheet: Sheet, plan: CushionPlan, place: PlanPlace, ch
 
 function drawGap(sheet: Sheet, plan: CushionPlan, { x, factor, format }: PlanPlace, foot: number): void {
   if (!plan.wall || plan.wall.gapMm <= 0) return;
-  const { x0 } = planBox(plan);
+  const { x0 } = outlineBox(plan.outline);
   const right = plan.wall.side === 'right';
   const edge = x + ((right ? plan.widthMm : 0) - x0) * factor;
   const wallX = edge + (right ? 1 : -1) * plan.wall.gapMm * factor;
@@ -142,7 +143,7 @@ function drawGap(sheet: Sheet, plan: CushionPlan, { x, factor, format }: PlanPla
 /** The quiet line: where the columns stand from the wall, for who sets out along it. */
 function drawWallChain(sheet: Sheet, plan: CushionPlan, { x, factor, format }: PlanPlace, at: number): void {
   if (!plan.wall) return;
-  const { x0 } = planBox(plan);
+  const { x0 } = outlineBox(plan.outline);
   const bare = bareOf(format);
   const right = plan.wall.side === 'right';
   const wallX = x + ((right ? plan.widthMm + plan.wall.gapMm : -plan.wall.gapMm) - x0) * factor;

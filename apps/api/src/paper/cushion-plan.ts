@@ -1,6 +1,7 @@
 import {
   offsetFault,
   offsetOutline,
+  outlineBox,
   type OutlineCorner,
   outlinePoints,
   outlineStretches,
@@ -9,7 +10,7 @@ import {
 import { drawClothWay } from './cloth-way';
 import { drawChains, type PlanChains } from './cushion-chains';
 import { MOST_CHAINED_CORNERS } from './outline-stops';
-import { type CushionPlan, onPaper, planBox, type PlanPlace } from './plan-place';
+import { type CushionPlan, onPaper, type PlanPlace } from './plan-place';
 import { PEN, type Sheet } from './sheet';
 import { TakenSpace, type WordPlace } from './taken-space';
 import { hatchWorn, numberWorn } from './worn-areas';
@@ -44,7 +45,7 @@ export function drawCushionPlan(sheet: Sheet, plan: CushionPlan, place: PlanPlac
 }
 
 function boxOnPaper({ plan, at }: Figure) {
-  const { x0, x1, y0, y1 } = planBox(plan);
+  const { x0, x1, y0, y1 } = outlineBox(plan.outline);
   const [left, top] = at([x0, y1]);
   const [right, bottom] = at([x1, y0]);
   return { x: left, y: top, width: right - left, height: bottom - top };
@@ -122,7 +123,7 @@ function drawClosure(figure: Figure): void {
 
 function drawWall({ sheet, plan, place, at }: Figure, chains: PlanChains): void {
   if (!plan.wall) return;
-  const { y0, y1 } = planBox(plan);
+  const { y0, y1 } = outlineBox(plan.outline);
   const right = plan.wall.side === 'right';
   const [x] = at([right ? plan.widthMm + plan.wall.gapMm : -plan.wall.gapMm, 0]);
   const top = place.y - chains.space.above + 4;
@@ -195,7 +196,7 @@ function crossings({ plan, at }: Figure, axis: 'x' | 'y', value: number): [numbe
 /** Radii of round corners, each inside its corner; all of them stand in the template's table too. */
 function nameRadii({ sheet, plan, place, at, taken }: Figure): void {
   if (plan.outline.length > MOST_CHAINED_CORNERS) return;
-  const box = planBox(plan);
+  const box = outlineBox(plan.outline);
   const middle = at([(box.x0 + box.x1) / 2, (box.y0 + box.y1) / 2]);
   for (const { at: corner, radiusMm } of plan.outline) {
     if (radiusMm < 0.5) continue;

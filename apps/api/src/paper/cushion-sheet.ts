@@ -10,6 +10,7 @@ import {
   OFF_JOINT_MM,
   orderDrop,
   orderDropWords,
+  outlineBox,
   scaleWords,
   shopScales,
 } from '@settlewright/geometry';
@@ -20,7 +21,7 @@ import { drawCushionPlan } from './cushion-plan';
 import { drawCushionFront, drawCushionSection } from './cushion-views';
 import { type OrderPages, PAD } from './order-pages';
 import { linesNeeded, paragraph } from './paragraph';
-import { type CushionPlan, planBox, type PlanPlace } from './plan-place';
+import { type CushionPlan, type PlanPlace } from './plan-place';
 import { sectionWords } from './section-words';
 import { leading, PEN, type Sheet } from './sheet';
 import type { SpecCushion, SpecPack } from './spec-pack';
@@ -71,7 +72,7 @@ function drawFigures(sheet: Sheet, pack: SpecPack, cushion: SpecCushion, frame: 
   const at = { ...place, x: left + chains.space.left, y: frame.top + HEAD_MM + chains.space.above };
   const moved = planChains(sheet, plan, at);
   drawCushionPlan(sheet, plan, at, moved);
-  const box = planBox(plan);
+  const box = outlineBox(plan.outline);
   const under = at.y + (box.y1 - box.y0) * at.factor + moved.space.below;
   const y = drawSums(sheet, sums, { x: left, y: under, width });
   const { thicknessMm, widthMm } = cushion.finished;
@@ -98,7 +99,7 @@ function placed(
   { units }: SpecPack,
   room: { width: number; height: number; cushion: SpecCushion },
 ): { place: PlanPlace; chains: PlanChains; scale: string } {
-  const box = planBox(plan);
+  const box = outlineBox(plan.outline);
   const format = (mm: number) => formatLength(mm, { ...units, feet: false });
   const tried = shopScales(units.system).map((ratio) => {
     const place = { x: 0, y: 0, factor: 1 / ratio, format, stepMm: lengthStep(units) };

@@ -1,5 +1,4 @@
-import type { OutlineCorner } from '@settlewright/geometry';
-import { planBox } from './plan-place';
+import { outlineBox, type OutlineCorner } from '@settlewright/geometry';
 
 /** Corners beyond this number stand in the table of the template alone: chains of them would not be read. */
 export const MOST_CHAINED_CORNERS = 14;
@@ -19,7 +18,7 @@ const SAME_MM = 0.4;
  * all. A side that has no more than its two ends says nothing.
  */
 export function outlineStops(outline: readonly OutlineCorner[]): OutlineStops {
-  const { x0, x1, y0, y1 } = planBox({ outline });
+  const { x0, x1, y0, y1 } = outlineBox(outline);
   if (outline.length > MOST_CHAINED_CORNERS) return { above: [], below: [], upright: [] };
   const middle = (y0 + y1) / 2;
   const xsOf = (is: (y: number) => boolean) => outline.filter(({ at }) => is(at[1])).map(({ at }) => at[0]);

@@ -1,4 +1,10 @@
-import type { CushionEdge, OutlineCorner, Point2, WearArea } from '@settlewright/geometry';
+import {
+  outlineBox,
+  type CushionEdge,
+  type OutlineCorner,
+  type Point2,
+  type WearArea,
+} from '@settlewright/geometry';
 
 /** A cushion laid flat, in real millimetres. Page left and right, since the paper is read that way. */
 export interface CushionPlan {
@@ -45,22 +51,9 @@ export interface PlanPlace {
   stepMm: number;
 }
 
-/** The box round the outline of a plan, y up the page. */
-export interface PlanBox {
-  x0: number;
-  x1: number;
-  y0: number;
-  y1: number;
-}
-
-export function planBox({ outline }: Pick<CushionPlan, 'outline'>): PlanBox {
-  const [xs, ys] = [outline.map(({ at }) => at[0]), outline.map(({ at }) => at[1])];
-  return { x0: Math.min(...xs), x1: Math.max(...xs), y0: Math.min(...ys), y1: Math.max(...ys) };
-}
-
 /** From the plan to the paper. */
 export function onPaper(plan: CushionPlan, { x, y, factor }: PlanPlace): (point: Point2) => Point2 {
-  const { x0, y1 } = planBox(plan);
+  const { x0, y1 } = outlineBox(plan.outline);
   return ([px, py]) => [x + (px - x0) * factor, y + (y1 - py) * factor];
 }
 

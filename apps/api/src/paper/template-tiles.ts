@@ -1,4 +1,10 @@
-import { outlineExtent, type OutlineCorner, outlinePoints, type Point2 } from '@settlewright/geometry';
+import {
+  outlineBox,
+  outlineExtent,
+  type OutlineCorner,
+  outlinePoints,
+  type Point2,
+} from '@settlewright/geometry';
 import { tilesOf } from '@settlewright/geometry/export';
 
 /** A sheet of a template at full size. */
@@ -31,7 +37,7 @@ export function templateLines(
   cut: readonly OutlineCorner[],
   buttons: readonly Point2[],
 ): TemplateLines {
-  const [left, top] = [Math.min(...cut.map(({ at }) => at[0])), Math.max(...cut.map(({ at }) => at[1]))];
+  const { x0: left, y1: top } = outlineBox(cut);
   const turned = ([x, y]: Point2): Point2 => [x - left, top - y];
   const { widthMm, depthMm } = outlineExtent(cut);
   return {

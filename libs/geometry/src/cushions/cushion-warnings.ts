@@ -1,4 +1,4 @@
-import { outlinePoints, type OutlineCorner, type Point2 } from '../outlines/outline.ts';
+import { outlineBox, outlinePoints, type OutlineCorner, type Point2 } from '../outlines/outline.ts';
 import { formatLength } from '../units/format-length.ts';
 import type { LengthStyle } from '../units/length-style.ts';
 import { fittingSize } from './cushion-sizes.ts';
@@ -60,16 +60,14 @@ function offJoint({ columns }: ButtonTable): CushionWarning[] {
 const BEYOND_MM = 0.5;
 
 function beyondPlace(spec: Pick<CushionSpec, 'outline' | 'placeMm' | 'gapsMm'>): CushionWarning[] {
-  const { outline } = spec;
   const { widthMm, depthMm } = fittingSize(spec);
-  const xs = outline.map(({ at }) => at[0]);
-  const ys = outline.map(({ at }) => at[1]);
+  const { x0, x1, y0, y1 } = outlineBox(spec.outline);
   const beyond = (
     [
-      ['left', Math.max(...xs) - widthMm],
-      ['right', -Math.min(...xs)],
-      ['back', Math.max(...ys) - depthMm],
-      ['front', -Math.min(...ys)],
+      ['left', x1 - widthMm],
+      ['right', -x0],
+      ['back', y1 - depthMm],
+      ['front', -y0],
     ] as const
   ).filter(([, mm]) => mm > BEYOND_MM);
   if (beyond.length === 0) return [];

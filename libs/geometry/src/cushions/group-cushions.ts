@@ -1,4 +1,4 @@
-import type { OutlineCorner } from '../outlines/outline.ts';
+import { outlineBox, type OutlineCorner } from '../outlines/outline.ts';
 import type { Foam } from '../room/document.ts';
 import type { CushionEdge } from './cushion-choice.ts';
 import type { CushionGroup, CushionSpec } from './cushion-spec.ts';
@@ -58,8 +58,7 @@ const onGrid = (shown: unknown): string =>
  */
 export function isMirrorOfItself(spec: CushionSpec): boolean {
   const { outline, make, wear } = spec;
-  const xs = outline.map(({ at }) => at[0]);
-  const both = Math.min(...xs) + Math.max(...xs);
+  const { x0, x1 } = outlineBox(outline);
   const spots = buttonSpots(spec);
   const places = (list: readonly (readonly [number, number])[]) =>
     list.map(([x, y]) => `${Math.round(x / GRID_MM)} ${Math.round(y / GRID_MM)}`).sort();
@@ -72,7 +71,7 @@ export function isMirrorOfItself(spec: CushionSpec): boolean {
   const mirrored = {
     outline: fromLowest(mirroredOutline(outline)),
     edge: otherEdge(make.closureEdge),
-    spots: places(spots.map(([x, y]) => [both - x, y] as const)),
+    spots: places(spots.map(([x, y]) => [x0 + x1 - x, y] as const)),
     wear: wear?.map((area) => onGrid(wearLikeness(mirroredWear(area)))).sort(),
   };
   return onGrid(made) === onGrid(mirrored);

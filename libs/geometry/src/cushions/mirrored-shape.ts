@@ -1,4 +1,4 @@
-import type { OutlineCorner } from '../outlines/outline.ts';
+import { outlineBox, type OutlineCorner } from '../outlines/outline.ts';
 import type { CushionShape } from './cushion-shape.ts';
 
 const OTHER: Readonly<Record<string, string>> = { left: 'right', right: 'left' };
@@ -13,13 +13,12 @@ export const otherEdge = <E extends string>(edge: E): E => (OTHER[edge] ?? edge)
  * @returns the same number of corners; left and right edges have changed names
  */
 export function mirroredOutline(corners: readonly OutlineCorner[]): OutlineCorner[] {
-  const xs = corners.map(({ at }) => at[0]);
-  const both = Math.min(...xs) + Math.max(...xs);
+  const { x0, x1 } = outlineBox(corners);
   const count = corners.length;
   return corners.map((_, j) => {
     const corner = corners[(count + 1 - j) % count]!;
     const edge = corners[(count - j) % count]!.edge;
-    return { at: [both - corner.at[0], corner.at[1]], radiusMm: corner.radiusMm, edge: otherEdge(edge) };
+    return { at: [x0 + x1 - corner.at[0], corner.at[1]], radiusMm: corner.radiusMm, edge: otherEdge(edge) };
   });
 }
 

@@ -1,15 +1,14 @@
-import { outlinePoints, type OutlineCorner, type Point2 } from '../outlines/outline.ts';
+import {
+  outlineBox,
+  outlinePoints,
+  type OutlineBox,
+  type OutlineCorner,
+  type Point2,
+} from '../outlines/outline.ts';
 import type { WearArea } from './wear.ts';
 
 /** How much of the cushion a named place takes on the drawing: a sign of where, not a size to hold to. */
 const SHARE = { edge: 1 / 5, end: 1 / 6, middle: 1 / 2 } as const;
-
-interface Rectangle {
-  x0: number;
-  x1: number;
-  y0: number;
-  y1: number;
-}
 
 interface Marked {
   outline: readonly OutlineCorner[];
@@ -22,9 +21,8 @@ interface Marked {
  * @param area - what was marked
  * @returns millimetres on the page; may reach beyond the outline
  */
-export function wearRectangle({ outline }: Marked, { place, areaMm }: WearArea): Rectangle {
-  const [xs, ys] = [outline.map(({ at }) => at[0]), outline.map(({ at }) => at[1])];
-  const all = { x0: Math.min(...xs), x1: Math.max(...xs), y0: Math.min(...ys), y1: Math.max(...ys) };
+export function wearRectangle({ outline }: Marked, { place, areaMm }: WearArea): OutlineBox {
+  const all = outlineBox(outline);
   const [w, d] = [all.x1 - all.x0, all.y1 - all.y0];
   switch (place) {
     case 'front-edge':

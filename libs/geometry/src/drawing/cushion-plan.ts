@@ -4,7 +4,13 @@ import { fittingSize } from '../cushions/cushion-sizes.ts';
 import { closurePath } from '../cushions/making/edge-strip.ts';
 import { wearHatch, wearRectangle } from '../cushions/wear-hatch.ts';
 import { wearMark } from '../cushions/wear.ts';
-import { offsetFault, offsetOutline, outlinePoints, type OutlineCorner } from '../outlines/outline.ts';
+import {
+  outlineBox,
+  offsetFault,
+  offsetOutline,
+  outlinePoints,
+  type OutlineCorner,
+} from '../outlines/outline.ts';
 import { WELT_MM } from './cushion-views.ts';
 import { datumChain, dimensionChain } from './dimension-chain.ts';
 import { drawingOf, type Drawing, type DrawShape, type PagePoint } from './drawing.ts';
@@ -154,9 +160,8 @@ function planChains(spec: CushionSpec, labelMm: number): DrawShape[] {
   const columns = spec.buttons.columns.map(({ fromSeamMm }) => fromSeamMm);
   const pageStops = [0, ...columns.map((c) => (fromLeft ? w - c : c)), w].sort((a, b) => a - b);
   const rows = [0, ...spec.buttons.rowsMm, d];
-  const xs = spec.outline.map(({ at }) => at[0]);
-  const ys = spec.outline.map(({ at }) => d - at[1]);
-  const [left, right, back, front] = [Math.min(...xs), Math.max(...xs), Math.min(...ys), Math.max(...ys)];
+  const { x0: left, x1: right, y0, y1 } = outlineBox(spec.outline);
+  const [back, front] = [d - y1, d - y0];
   const shapes: DrawShape[] = [
     {
       kind: 'dimension',

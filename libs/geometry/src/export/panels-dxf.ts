@@ -1,6 +1,12 @@
 import { LineTypes, LWPolylineFlags, point2d, point3d } from '@tarikjabiri/dxf';
 import type { CutPanel } from '../cushions/making/cut-panels.ts';
-import { outlineExtent, outlineStretches, type OutlineCorner, type Point2 } from '../outlines/outline.ts';
+import {
+  outlineBox,
+  outlineExtent,
+  outlineStretches,
+  type OutlineCorner,
+  type Point2,
+} from '../outlines/outline.ts';
 import { MM_PER_INCH } from '../units/length-style.ts';
 import { plainText } from './plain-text.ts';
 import { newDxf } from './new-dxf.ts';
@@ -32,7 +38,7 @@ export function panelsDxf(panels: readonly TitledPanel[], units: 'millimetres' |
   for (const name of Object.values(LAYERS)) dxf.addLayer(name, 7, LineTypes.Continuous);
   let right = 0;
   for (const { title, panel } of panels) {
-    const least = Math.min(...panel.cut.map(({ at }) => at[0]));
+    const least = outlineBox(panel.cut).x0;
     const shift = right - least;
     const at = ([x, y]: Point2) => point3d((x + shift) / per, y / per, 0);
     const closed = (corners: readonly OutlineCorner[], layerName: string) => {

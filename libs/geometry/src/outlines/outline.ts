@@ -160,10 +160,24 @@ export function outlineArea(corners: readonly OutlineCorner[]): number {
   return chords + segments;
 }
 
+/** What an outline stands in: across the page and up the page, millimetres. */
+export interface OutlineBox {
+  x0: number;
+  x1: number;
+  y0: number;
+  y1: number;
+}
+
+/** The box round the corners of an outline. */
+export function outlineBox(corners: readonly Pick<OutlineCorner, 'at'>[]): OutlineBox {
+  const [xs, ys] = [corners.map(({ at }) => at[0]), corners.map(({ at }) => at[1])];
+  return { x0: Math.min(...xs), x1: Math.max(...xs), y0: Math.min(...ys), y1: Math.max(...ys) };
+}
+
 /** Width across the page and depth up the page of the corners of an outline. */
 export function outlineExtent(corners: readonly OutlineCorner[]): { widthMm: number; depthMm: number } {
-  const [xs, ys] = [corners.map(({ at }) => at[0]), corners.map(({ at }) => at[1])];
-  return { widthMm: Math.max(...xs) - Math.min(...xs), depthMm: Math.max(...ys) - Math.min(...ys) };
+  const { x0, x1, y0, y1 } = outlineBox(corners);
+  return { widthMm: x1 - x0, depthMm: y1 - y0 };
 }
 
 /**

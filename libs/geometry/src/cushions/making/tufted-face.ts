@@ -1,4 +1,4 @@
-import { outlineExtent, type OutlineCorner } from '../../outlines/outline.ts';
+import { outlineBox, outlineExtent, type OutlineCorner } from '../../outlines/outline.ts';
 import type { CushionTufting } from '../cushion-spec.ts';
 import { tuftedCloth } from '../tufting.ts';
 import { CONSTRUCTION_WORDS, type CushionMake } from './cushion-make.ts';
@@ -58,11 +58,8 @@ function roundTheMiddle(
   size: { widthMm: number; heightMm: number },
   outline: readonly OutlineCorner[],
 ): OutlineCorner[] {
-  const middle = (axis: 0 | 1) => {
-    const values = outline.map(({ at }) => at[axis]);
-    return (Math.min(...values) + Math.max(...values)) / 2;
-  };
-  const [dx, dy] = [middle(0) - size.widthMm / 2, middle(1) - size.heightMm / 2];
+  const { x0, x1, y0, y1 } = outlineBox(outline);
+  const [dx, dy] = [(x0 + x1 - size.widthMm) / 2, (y0 + y1 - size.heightMm) / 2];
   return rectangleOutline(size.widthMm, size.heightMm).map((corner) => ({
     ...corner,
     at: [corner.at[0] + dx, corner.at[1] + dy],
