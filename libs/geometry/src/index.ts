@@ -23,6 +23,7 @@ export * from './room/mirror-pieces.ts';
 export * from './room/array-pieces.ts';
 export * from './room/carry-pieces.ts';
 export * from './room/snap-piece.ts';
+export { isSame } from './room/leaves.ts';
 export type { DocumentDifference } from './room/document-difference.ts';
 export * from './room/diff-documents.ts';
 export * from './room/merge-documents.ts';
@@ -92,7 +93,6 @@ export { buildPhrase } from './cushions/build-phrase.ts';
 export { foamOfCushion } from './cushions/foam-of-cushion.ts';
 export { plainMake } from './cushions/made-of.ts';
 export type { RunJoints } from './cushions/run-joints.ts';
-export { isSame } from './room/leaves.ts';
 export {
   TUFT_LINE_WORDS,
   TUFTING_WORDS,

@@ -7,7 +7,7 @@ import type { HoldDown } from './cushion-choice.ts';
 import type { CushionRun } from './cushion-runs.ts';
 import type { CushionSettings } from './cushion-settings.ts';
 import type { ButtonTable, CushionTufting, RowsOverSeat } from './cushion-spec.ts';
-import type { TuftingChoice } from './tufting-choice.ts';
+import type { TuftingChoice, TuftLinesOf } from './tufting-choice.ts';
 import { borderedField } from './tufting.ts';
 import { tuftColumns } from './tufts-on-lines.ts';
 
@@ -25,6 +25,9 @@ interface Buttoned {
   tufting: CushionTufting;
   buttons: ButtonTable;
 }
+
+const linesFor = (which: TuftLinesOf, { lines }: OnBench): readonly number[] =>
+  (which === 'joints' ? lines?.jointsMm : lines?.centresMm) ?? [];
 
 const table = (alignedTo: ButtonTable['alignedTo']): ButtonTable => ({
   columns: [],
@@ -56,7 +59,7 @@ export function buttonsOf(
     return { tufting: { kind: 'none', pullMm: 0 }, buttons: table(alignedTo) };
   }
   const edgeMm = settings.buttonToEdge.valueMm;
-  const linesMm = alignedTo === 'joints' ? on.lines.jointsMm : on.lines.centresMm;
+  const linesMm = linesFor(alignedTo, on);
   const xs = buttonColumns(on.seams.low, on.seams.high, { linesMm, every: wanted.everyBoards, edgeMm });
   // Chosen of a cushion whose bench asks for none there: two rows, as a new bench has.
   const rowsMm = xs.length === 0 ? [] : buttonRows(on.finishedMm.depthMm, asked ? wanted.rows : 2, edgeMm);
@@ -91,21 +94,18 @@ function fieldOf(choice: Extract<TuftingChoice, { kind: 'biscuit' | 'diamond' }>
   const { kind, borderMm, tuftMm, fullness, columnsOn } = choice;
   const { widthMm, depthMm, thicknessMm } = on.finishedMm;
   const filled = borderedField({ widthMm, heightMm: depthMm }, borderMm, tuftMm);
-  const { high } = filled;
-  const { heightMm } = filled.diamond;
+  const { high, diamond } = filled;
   const steps = kind === 'diamond' ? 2 : 1;
   const along = (count: number, one: number): number[] =>
     Array.from({ length: steps * count + 1 }, (_, i) => borderMm + (i * one) / steps);
   const xs = columnsOn
     ? tuftColumns({
-        linesMm: (columnsOn === 'joints' ? on.lines?.jointsMm : on.lines?.centresMm) ?? [],
+        linesMm: linesFor(columnsOn, on),
         lowMm: on.seams.low,
         highMm: on.seams.high,
         ...{ borderMm, widthMm: tuftMm.widthMm, steps },
       })
-    : filled.across > 0
-      ? along(filled.across, filled.diamond.widthMm).map((mm) => on.seams.low + mm)
-      : [];
+    : along(filled.across, diamond.widthMm).map((mm) => on.seams.low + mm);
   const across = Math.max(0, (xs.length - 1) / steps);
   const tufting: CushionTufting = {
     kind,
@@ -114,14 +114,14 @@ function fieldOf(choice: Extract<TuftingChoice, { kind: 'biscuit' | 'diamond' }>
       across,
       high,
       widthMm: across > 0 ? (xs.at(-1)! - xs[0]!) / across : 0,
-      ...{ heightMm, borderMm },
+      ...{ heightMm: diamond.heightMm, borderMm },
       ...(columnsOn && { columnsOn }),
     },
     fullness,
   };
   const alignedTo = columnsOn ?? 'field';
   if (across === 0 || high === 0) return { tufting, buttons: table(alignedTo) };
-  const rowsMm = along(high, heightMm);
+  const rowsMm = along(high, diamond.heightMm);
   const columns = columnsAt(xs, on);
   const all = columns.length * rowsMm.length;
   return {
