@@ -19,6 +19,7 @@ import { RoomStoreProvider } from '../room-store-provider.tsx';
 import { createViewController } from '../scene/view-controller.ts';
 import type { ViewFrame } from '../scene/view-frame.ts';
 import { createRoomStore, undoNames, type RoomStore } from '../store.ts';
+import { FRONT_FRAME } from '../test/front-frame.ts';
 import HandleLayer from './handle-layer.tsx';
 
 const engine = { model: createBodyModel(summary), ruleBook: loadRuleBook(rules) };
@@ -26,15 +27,7 @@ const added = addPiece(emptySetDocument(), 'bench', { xMm: 0, zMm: 0, turnDeg: 0
 const INCH = 25.4;
 
 /** Straight from in front, one pixel to two millimetres. */
-const FRONT: ViewFrame = {
-  target: [0, 500, 0],
-  orientation: [0, 0, 0, 1],
-  perspective: 0,
-  eyeMm: [0, 0],
-  centreMm: [0, 0],
-  halfHeightMm: 1000,
-  depthMm: [5000, -5000],
-};
+const FRONT: ViewFrame = { ...FRONT_FRAME, target: [0, 500, 0], depthMm: [5000, -5000] };
 
 const FREE = createLabelBoxes();
 

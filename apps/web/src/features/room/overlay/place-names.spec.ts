@@ -1,16 +1,7 @@
 import { describe, expect, it } from 'vitest';
-import type { ViewFrame } from '../scene/view-frame.ts';
+import { FRONT_FRAME } from '../test/front-frame.ts';
 import { placeNames, placeNamesAtHeads } from './place-names.ts';
 
-const frame: ViewFrame = {
-  target: [0, 0, 0],
-  orientation: [0, 0, 0, 1],
-  perspective: 0,
-  eyeMm: [0, 0],
-  centreMm: [0, 0],
-  halfHeightMm: 1000,
-  depthMm: [3000, -3000],
-};
 const viewport = { width: 800, height: 400 };
 
 describe('names at the heads', () => {
@@ -21,7 +12,7 @@ describe('names at the heads', () => {
       width: 70,
       height: 16,
     }));
-    const [one, next, far] = placeNamesAtHeads(frame, viewport, heads);
+    const [one, next, far] = placeNamesAtHeads(FRONT_FRAME, viewport, heads);
     expect(next!.x - one!.x).toBeLessThan(70);
     expect(next!.y - one!.y).toBeGreaterThanOrEqual(17);
     expect(far!.y).toBe(one!.y);
@@ -36,7 +27,7 @@ describe('names above the heads', () => {
       width: 70,
       height: 16,
     }));
-    const placed = placeNames(frame, viewport, heads);
+    const placed = placeNames(FRONT_FRAME, viewport, heads);
     expect(placed.map((name) => name.id)).toEqual(['p1', 'p2', 'p0', 'p3']);
     expect(new Set(placed.map((name) => name.y)).size).toBe(1);
     placed
@@ -51,7 +42,7 @@ describe('names above the heads', () => {
       width: 90,
       height: 16,
     }));
-    for (const name of placeNames(frame, viewport, heads))
+    for (const name of placeNames(FRONT_FRAME, viewport, heads))
       expect(name.x + 45).toBeLessThanOrEqual(794 + 1e-6);
   });
 
@@ -62,7 +53,7 @@ describe('names above the heads', () => {
       width: 110,
       height: 16,
     }));
-    const placed = placeNames(frame, viewport, heads);
+    const placed = placeNames(FRONT_FRAME, viewport, heads);
     expect(new Set(placed.map((name) => name.id)).size).toBe(14);
     for (const name of placed) {
       expect(name.x - 55).toBeGreaterThanOrEqual(6 - 1e-6);

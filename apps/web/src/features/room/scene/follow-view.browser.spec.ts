@@ -1,17 +1,7 @@
 import { describe, expect, it } from 'vitest';
+import { FRONT_FRAME } from '../test/front-frame.ts';
 import { followView } from './follow-view.ts';
 import { createViewController } from './view-controller.ts';
-import type { ViewFrame } from './view-frame.ts';
-
-const frame: ViewFrame = {
-  target: [0, 0, 0],
-  orientation: [0, 0, 0, 1],
-  perspective: 0,
-  eyeMm: [0, 0],
-  centreMm: [0, 0],
-  halfHeightMm: 1000,
-  depthMm: [1, -1],
-};
 
 function follow() {
   const done: string[] = [];
@@ -33,17 +23,17 @@ describe('the picture that follows the view', () => {
   it('is made anew and drawn at once on a sheet of another size', () => {
     const { controller, done } = follow();
     controller.resize({ width: 800, height: 320 });
-    controller.show(frame, false);
+    controller.show(FRONT_FRAME, false);
     expect(done).toEqual(['800 by 320', 'drawn']);
   });
 
   it('waits for the next frame where only the view moved, and stops when told', () => {
     const { controller, done, stop } = follow();
     controller.resize({ width: 800, height: 500 });
-    controller.show(frame, false);
+    controller.show(FRONT_FRAME, false);
     expect(done).toEqual(['asked for']);
     stop();
-    controller.show(frame, false);
+    controller.show(FRONT_FRAME, false);
     expect(done).toHaveLength(1);
   });
 });
