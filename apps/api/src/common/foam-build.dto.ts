@@ -1,5 +1,5 @@
 import type { FoamBuild } from '@settlewright/geometry';
-import { ApiProperty } from '@nestjs/swagger';
+import { ApiProperty, ApiPropertyOptional } from '@nestjs/swagger';
 import { IsNumber, Max, Min } from 'class-validator';
 
 type Layer = NonNullable<FoamBuild['layers']>[number];
@@ -33,4 +33,22 @@ export class CushionWrapDto implements Wrap {
   @Min(0)
   @Max(60)
   lostMm: number;
+}
+
+/** What a foam goes down by, as it is read. */
+export class FoamMakeDto implements Omit<FoamBuild, 'thicknessMm'> {
+  @ApiProperty({ description: '25 % indentation force deflection, newtons' })
+  ifd25N: number;
+  @ApiProperty()
+  supportFactor: number;
+  @ApiPropertyOptional({ type: [CushionFoamLayerDto], description: 'from the top down' })
+  layers?: CushionFoamLayerDto[];
+  @ApiPropertyOptional({ type: CushionWrapDto })
+  wrap?: CushionWrapDto;
+}
+
+/** The same with its thickness. */
+export class FoamBuildDto extends FoamMakeDto implements FoamBuild {
+  @ApiProperty()
+  thicknessMm: number;
 }

@@ -16,7 +16,7 @@ import {
 import { DAY_WORDS, isPastDay } from '../cast/day';
 import { WithinLimit } from '../cast/limit.decorator';
 import { NAME_MAX, WEIGHT_LIMIT } from '../cast/limits';
-import { CushionFoamLayerDto, CushionWrapDto } from '../common/foam-build.dto';
+import { CushionFoamLayerDto, CushionWrapDto, FoamBuildDto } from '../common/foam-build.dto';
 import { TextField } from '../common/text-field';
 import type { TestSitRow } from './test-sit.entity';
 
@@ -109,7 +109,7 @@ export class AddTestSitDto {
   note?: string;
 }
 
-export class TestSitDto {
+export class TestSitDto extends FoamBuildDto {
   @ApiProperty({ format: 'uuid' })
   id: string;
   @ApiPropertyOptional({ format: 'uuid' })
@@ -120,16 +120,6 @@ export class TestSitDto {
   satOn: string;
   @ApiProperty()
   grade: string;
-  @ApiProperty()
-  ifd25N: number;
-  @ApiProperty()
-  supportFactor: number;
-  @ApiProperty()
-  thicknessMm: number;
-  @ApiPropertyOptional({ type: [CushionFoamLayerDto] })
-  layers?: CushionFoamLayerDto[];
-  @ApiPropertyOptional({ type: CushionWrapDto })
-  wrap?: CushionWrapDto;
   @ApiProperty()
   weightKg: number;
   @ApiProperty({ description: 'by the estimate alone, whatever other sits say' })

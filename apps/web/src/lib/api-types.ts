@@ -2984,6 +2984,13 @@ export interface components {
             lostMm: number;
         };
         TestSitDto: {
+            /** @description 25 % indentation force deflection, newtons */
+            ifd25N: number;
+            supportFactor: number;
+            /** @description from the top down */
+            layers?: components["schemas"]["CushionFoamLayerDto"][];
+            wrap?: components["schemas"]["CushionWrapDto"];
+            thicknessMm: number;
             /** Format: uuid */
             id: string;
             /** Format: uuid */
@@ -2993,11 +3000,6 @@ export interface components {
             /** Format: date */
             satOn: string;
             grade: string;
-            ifd25N: number;
-            supportFactor: number;
-            thicknessMm: number;
-            layers?: components["schemas"]["CushionFoamLayerDto"][];
-            wrap?: components["schemas"]["CushionWrapDto"];
             weightKg: number;
             /** @description by the estimate alone, whatever other sits say */
             predictedMm: number;
@@ -4306,12 +4308,14 @@ export interface components {
             edge?: "back" | "front" | "left" | "right";
             edges?: ("back" | "front" | "left" | "right")[];
         };
-        TestedCushionDto: {
-            thicknessMm: number;
+        FoamBuildDto: {
+            /** @description 25 % indentation force deflection, newtons */
             ifd25N: number;
             supportFactor: number;
+            /** @description from the top down */
             layers?: components["schemas"]["CushionFoamLayerDto"][];
             wrap?: components["schemas"]["CushionWrapDto"];
+            thicknessMm: number;
         };
         TestedFoamDto: {
             /** @description by what the estimate of the drop is multiplied */
@@ -4325,16 +4329,17 @@ export interface components {
              */
             on: string;
             /** @description what was sat on */
-            of: components["schemas"]["TestedCushionDto"];
+            of: components["schemas"]["FoamBuildDto"];
         };
         CushionFoamDto: {
-            grade: string;
-            densityKgM3: number;
+            /** @description 25 % indentation force deflection, newtons */
             ifd25N: number;
             supportFactor: number;
             /** @description from the top down */
             layers?: components["schemas"]["CushionFoamLayerDto"][];
             wrap?: components["schemas"]["CushionWrapDto"];
+            grade: string;
+            densityKgM3: number;
             tested?: components["schemas"]["TestedFoamDto"];
         };
         TuftFieldDto: {
