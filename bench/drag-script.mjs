@@ -24,20 +24,16 @@ const isBare = (page, { x, y }) =>
     [x, y],
   );
 
-/** Takes hold of the selected bench on the plan, wherever it can be had, and carries it. */
+/** Takes hold of the selected bench on the plan, wherever it can be had beside its right end, and carries it. */
 async function carry(page) {
-  for (const asideShare of [0.2, 0.3, 0.5, 0.6, 0.8]) {
-    for (const byPx of [-50, -56, -62, -68]) {
-      // Asked for each time: a press beside the bench has moved the sheet.
-      const [left, right] = await Promise.all(
-        ['length, left end', 'length, right end'].map(async (end) =>
-          middleOf(await grip(page, end).boundingBox()),
-        ),
-      );
-      const x = left.x + (right.x - left.x) * asideShare;
-      const spot = { x, y: (left.y + right.y) / 2 + byPx };
+  for (const asidePx of [-60, -110, -160]) {
+    for (const downPx of [8, 16, 24, 32]) {
+      const right = middleOf(await grip(page, 'length, right end').boundingBox());
+      const spot = { x: right.x + asidePx, y: right.y + downPx };
       const carried = (await isBare(page, spot)) && (await dragFrom(page, spot));
       if (carried) return carried;
+      // A press beside the bench has moved the sheet.
+      await page.getByRole('button', { name: 'Fit the set into the sheet' }).click();
       await page.waitForTimeout(PAUSE_MS);
     }
   }
