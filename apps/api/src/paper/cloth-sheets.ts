@@ -1,4 +1,5 @@
 import {
+  buyWords,
   chartNote,
   DIRECTION_WORDS,
   formatLength,
@@ -74,13 +75,16 @@ function drawClothWords({ sheet, frame, y }: OrderPage, one: ClothOnPaper, units
       : 'no repeat';
   const x = frame.left + PAD;
   const width = frame.right - frame.left - 2 * PAD;
+  const { missing } = buyWords(cloth);
   const buy = laid
-    ? `Buy ${clothLength(laid.buyMm, units)}. The layout takes ${clothLength(laid.layout.lengthMm, units)}` +
+    ? `${missing ? 'Buy at least' : 'Buy'} ${clothLength(laid.buyMm, units)}. The layout takes ${clothLength(laid.layout.lengthMm, units)}` +
       `${cover.startMm > 0 ? ` and ${show(cover.startMm)} are left out at the start` : ''}; ` +
       `${Math.round(laid.waste * 100)}\u00a0% of what is bought ends in no panel. ` +
-      (laid.chartMm === undefined
-        ? 'No chart speaks of this cloth.'
-        : `By the chart ${clothLength(laid.chartMm, units)}.`)
+      (missing
+        ? `NOT in it: ${missing}.`
+        : laid.chartMm === undefined
+          ? 'No chart speaks of this cloth.'
+          : `By the chart ${clothLength(laid.chartMm, units)}.`)
     : `No layout: ${cloth.faults.join('; ') || 'nothing is cut from it'}.`;
   let at = paragraph(sheet, [{ text: buy, weight: 600 }], x, y + 5.2, width);
   const described = one.assumed
@@ -109,7 +113,7 @@ function ownClothWords({ cloth, laid }: ClothOnPaper, units: LengthStyle): strin
       ? ''
       : spare < 0
         ? `SHORT by ${clothLength(-spare, units)}`
-        : `${clothLength(spare, units)} to spare`,
+        : `${clothLength(spare, units)} to spare${cloth.faults.length > 0 ? ' at most' : ''}`,
     com.flaws ? `flaws: ${com.flaws}` : 'no flaws written down',
   ]
     .filter(Boolean)

@@ -1,4 +1,10 @@
-import { formatLength, HANDEDNESS_WORDS, marksWords, orderAssumptions } from '@settlewright/geometry';
+import {
+  buyWords,
+  formatLength,
+  HANDEDNESS_WORDS,
+  marksWords,
+  orderAssumptions,
+} from '@settlewright/geometry';
 import { CHECK_BAR_MM, drawCheckBar } from './check-bar';
 import { drawDrawing } from './drawing-on-paper';
 import { type OrderPages, PAD } from './order-pages';
@@ -159,7 +165,7 @@ function orderFacts(pack: SpecPack): Fact[] {
   const zips = totals.zips.map(({ lengthMm, count }) => `${count} × ${show(lengthMm)}`).join(', ');
   const cloths = pack.cloths.map(({ cloth, laid, assumed }) =>
     laid
-      ? `${cloth.cover.name}: buy ${clothLength(laid.buyMm, units)}${assumed ? ', as assumed' : ''}`
+      ? `${cloth.cover.name}: ${buyWords(cloth).buy} ${clothLength(laid.buyMm, units)}${assumed ? ', as assumed' : ''}`
       : `${cloth.cover.name}: no layout`,
   );
   const takes = [

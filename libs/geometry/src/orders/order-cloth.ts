@@ -19,13 +19,14 @@ export interface ClothOfOrder {
   cover: OrderCover;
   marks: string[];
   cloth: ClothOrder;
+  /** Those that the cloth is wide enough for, of cushions that can be made. */
   panels: ClothPanel[];
   /** By the quick rule and the chart for repeats, for whole covers; `undefined` beyond the chart. */
   chartMm: number | undefined;
   /** What to buy by the chart; `undefined` where there is no chart for it or the cloth covers parts only. */
   buyMm: number | undefined;
   cost?: ClothCost;
-  /** Why it cannot be laid, in words. */
+  /** What is not among the panels and why, in words: a layout is then of the rest, and what it buys the least. */
   faults: string[];
 }
 
@@ -35,11 +36,12 @@ export interface LaidCloth {
   buyMm: number;
   /** Part of what is bought that ends in no panel. */
   waste: number;
+  /** `undefined` also where panels are missing: nothing to be compared with. */
   chartMm: number | undefined;
   /** True when layout and chart differ by more than 15 in 100. */
   differs: boolean;
   cost?: ClothCost;
-  /** Length that came in, less what has to be there; negative when it is short. */
+  /** Length that came in, less what has to be there; negative when it is short. The most where panels are missing. */
   spareMm?: number;
 }
 
@@ -67,7 +69,7 @@ export function clothOfOrder(
     startMm: cover.startMm,
     stepMm: cover.stepMm,
   };
-  const panels = coverPanels(
+  const all = coverPanels(
     covered.flatMap((spec) =>
       spec.making
         ? [
@@ -84,7 +86,9 @@ export function clothOfOrder(
     cloth,
     settings,
   );
-  const wide = panels.filter((panel) => waysOf(panel, usableWidthMm(cloth)).length === 0);
+  const usable = usableWidthMm(cloth);
+  const panels = all.filter((panel) => waysOf(panel, usable).length > 0);
+  const wide = all.filter((panel) => !panels.includes(panel));
   const unmade = covered.filter(({ making }) => !making).map(({ mark }) => mark);
   const whole = (cover.parts ?? COVER_PARTS).length === COVER_PARTS.length;
   const chartMm = whole
@@ -115,11 +119,12 @@ export function clothOfOrder(
  *
  * @param one - from `orderModel`; plain data, so it can be sent to a worker
  * @param tries - layouts to try; the answer is the same for the same number
- * @returns `undefined` for a cloth with faults or without panels
+ * @returns the layout of its panels; `undefined` without any. Ask `faults` what is missing
  */
 export function layCloth(one: ClothOfOrder, tries = TRIES): LaidCloth | undefined {
-  const { cover, cloth, panels, chartMm, faults } = one;
-  if (faults.length > 0 || panels.length === 0) return undefined;
+  const { cover, cloth, panels, faults } = one;
+  if (panels.length === 0) return undefined;
+  const chartMm = faults.length === 0 ? one.chartMm : undefined;
   const laid = layPanels(panels, cloth, chartMm, tries);
   const cost = costOf(cover, laid.buyMm, laid.waste);
   const received = cover.com?.receivedMm;

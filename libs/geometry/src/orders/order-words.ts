@@ -69,6 +69,16 @@ export function orderAssumptions({ schedule, cloths, buttons }: OrderModel, styl
 }
 
 /**
+ * What a layout says of the length to buy: a part of the panels tells the least only.
+ *
+ * @param one - the cloth
+ * @returns the words before the length, and what is not in it
+ */
+export function buyWords({ faults }: ClothOfOrder): { buy: string; missing?: string } {
+  return faults.length === 0 ? { buy: 'buy' } : { buy: 'buy at least', missing: faults.join('; ') };
+}
+
+/**
  * What a sheet says of the chart beside a layout.
  *
  * @param one - the cloth
@@ -79,6 +89,7 @@ export function orderAssumptions({ schedule, cloths, buttons }: OrderModel, styl
 export function chartNote(one: ClothOfOrder, laid: LaidCloth, style: LengthStyle): string | undefined {
   const show = (mm: number) => formatLength(mm, style);
   if (laid.chartMm === undefined) {
+    if (one.faults.length > 0) return undefined;
     const { acrossMm, alongMm } = one.cover.repeatMm;
     return acrossMm + alongMm > 0 && !one.cover.parts
       ? 'The repeat is beyond the chart of the trade.'

@@ -1,4 +1,11 @@
-import { chartNote, DIRECTION_WORDS, marksWords, NAP_WORDS, type ClothOfOrder } from '@settlewright/geometry';
+import {
+  buyWords,
+  chartNote,
+  DIRECTION_WORDS,
+  marksWords,
+  NAP_WORDS,
+  type ClothOfOrder,
+} from '@settlewright/geometry';
 import { useQuery } from '@tanstack/react-query';
 import type { ReactNode } from 'react';
 import { useFormat } from '@/lib/format.ts';
@@ -26,9 +33,10 @@ export function ClothFacts({ cloth, assumed }: { cloth: ClothOfOrder; assumed: b
     staleTime: Infinity,
   });
   const laid = layout.data ?? undefined;
-  const { cover, marks, faults } = cloth;
+  const { cover, marks } = cloth;
   const { acrossMm, alongMm } = cover.repeatMm;
   const inches = (mm: number) => length(mm, { feet: false });
+  const { missing } = buyWords(cloth);
   const long = (mm: number) => clothLength(mm, style);
   const cost = laid?.cost ?? cloth.cost;
   const note = laid && chartNote(cloth, laid, style);
@@ -36,21 +44,26 @@ export function ClothFacts({ cloth, assumed }: { cloth: ClothOfOrder; assumed: b
     <dl className="text-sm">
       <Fact words="Cloth to buy">
         {laid ? (
-          <b className="font-semibold">{long(laid.buyMm)}</b>
-        ) : cloth.buyMm !== undefined && faults.length === 0 ? (
+          <>
+            {missing && 'at least '}
+            <b className="font-semibold">{long(laid.buyMm)}</b>
+          </>
+        ) : cloth.buyMm !== undefined && !missing ? (
           `about ${long(cloth.buyMm)} by the chart`
         ) : (
           'not known yet'
         )}
         {assumed && laid && ', as assumed'}
         {laid && `, ${Math.round(100 * laid.waste)} % of it waste`}
-        {layout.isPending && faults.length === 0 && ', being laid'}
+        {layout.isPending && ', being laid'}
       </Fact>
+      {missing && <Fact words="Not in it">{missing}</Fact>}
       {layout.error && <Fact words="Layout">{sayProblem(layout.error)}</Fact>}
       {laid?.chartMm !== undefined && <Fact words="Chart of the trade">{long(laid.chartMm)}</Fact>}
       {note && <Fact words="Note">{note}</Fact>}
       {cost && (
         <Fact words="Cost">
+          {missing && 'at least '}
           {moneyText(cost.totalMinor, cost.currency)}
           {cost.wasteMinor !== undefined &&
             `, ${moneyText(cost.wasteMinor, cost.currency)} of it for what is wasted`}
@@ -84,7 +97,10 @@ export function ClothFacts({ cloth, assumed }: { cloth: ClothOfOrder; assumed: b
           ].join('; ')}
           {laid?.spareMm !== undefined && (
             <span className={laid.spareMm < 0 ? 'font-medium text-wont' : undefined}>
-              ; {laid.spareMm < 0 ? `short by ${long(-laid.spareMm)}` : `${long(laid.spareMm)} to spare`}
+              ;{' '}
+              {laid.spareMm < 0
+                ? `short by ${long(-laid.spareMm)}`
+                : `${long(laid.spareMm)} to spare${missing ? ' at most' : ''}`}
             </span>
           )}
         </Fact>
