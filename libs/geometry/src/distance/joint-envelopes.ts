@@ -1,7 +1,7 @@
 import { toRoom } from '../mannequin/body-placement.ts';
 import { readFigure } from '../mannequin/figure.ts';
 import type { JointRanges, JointSweep } from '../mannequin/joint-ranges.ts';
-import { legLine } from '../mannequin/leg-sections.ts';
+import { legLine } from '../mannequin/leg-line.ts';
 import type { MannequinPose } from '../mannequin/pose.ts';
 import {
   bendPoint,
@@ -62,19 +62,22 @@ export function jointEnvelopes(pose: MannequinPose, { sweeps }: JointRanges): Jo
   const shoulder = bendPoint(f, stance, restShoulder(f));
   // What is swept is the flesh of the elbow, round its middle.
   const upperMm = length(sub(restElbowFlesh(f), restShoulder(f)));
-  const { hip, knee } = legLine(f, stance, 0);
+  const legs = stance.legs.map((leg) => legLine(f, leg));
   const elbowAt = (forwards: number, outwards: number): Vec3 => {
     const out: Vec3 = [Math.sin(outwards), -Math.cos(outwards), 0];
     const ahead = turnAboutX(out, ZERO, -forwards);
     return add(shoulder, scale(turnAboutX(ahead, ZERO, chestRad(stance)), upperMm));
   };
-  const kneeAt = (lifted: number, outwards: number): Vec3 =>
-    add(hip, turnAboutY(turnAboutX(sub(knee, hip), ZERO, -lifted), ZERO, outwards));
+  const kneeOf =
+    ({ hip, knee }: (typeof legs)[number]) =>
+    (lifted: number, outwards: number): Vec3 =>
+      add(hip, turnAboutY(turnAboutX(sub(knee, hip), ZERO, -lifted), ZERO, outwards));
   return sweeps.flatMap((sweep) =>
     (['left', 'right'] as const).map((side): JointEnvelope => {
       const radiusMm = sweep.joint === 'elbow' ? f.radius.elbow : kneeRadius(f);
+      const jointAt = sweep.joint === 'elbow' ? elbowAt : kneeOf(legs[side === 'left' ? 0 : 1]!);
       const centresMm = turnsOf(sweep).map(({ forwards, outwards }) => {
-        const at = (sweep.joint === 'elbow' ? elbowAt : kneeAt)(forwards, outwards);
+        const at = jointAt(forwards, outwards);
         return toRoom(placement, side === 'left' ? at : mirror(at));
       });
       return {

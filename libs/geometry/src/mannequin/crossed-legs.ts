@@ -1,9 +1,9 @@
 import type { Figure } from './figure.ts';
 import type { Legs } from './leg-posture.ts';
-import { restAnkle, restKnee, type ShinStance, type Stance } from './stance.ts';
+import { restAnkle, restKnee, type LegStance, type Stance } from './stance.ts';
 import { clamp, mix } from './vector.ts';
 
-const TOES_OUT_RAD = 0.12;
+export const TOES_OUT_RAD = 0.12;
 /** Air between shins and between shoes that cross. */
 const AIR_MM = 12;
 /** Sections of a leg are rounder than boxes and fuller than ellipses by this exponent. */
@@ -15,9 +15,17 @@ const BACK_RAD = (15 * Math.PI) / 180;
 const HEEL_OFF_MM = 10;
 
 /** Both legs alike. */
-export function sideBySide({ shinRad, footRad }: Legs): Stance['shins'] {
-  const shin: ShinStance = { shinRad, footRad, toesOutRad: TOES_OUT_RAD, inwardRad: 0 };
-  return [shin, shin];
+export function sideBySide({ thighRad, shinRad, footRad }: Legs): Stance['legs'] {
+  const leg: LegStance = {
+    thighRad,
+    acrossRad: 0,
+    shinRad,
+    footRad,
+    toesOutRad: TOES_OUT_RAD,
+    inwardRad: 0,
+    footInwardRad: 0,
+  };
+  return [leg, leg];
 }
 
 /**
@@ -31,7 +39,7 @@ export function sideBySide({ shinRad, footRad }: Legs): Stance['shins'] {
  * @param seatFrontMm - front of the seat before the rearmost buttock
  * @source geometry of shins and shoes; how far is turned stays within the published range of the hip
  */
-export function crossedShins(f: Figure, legs: Legs, tiltRad: number, seatFrontMm: number): Stance['shins'] {
+export function crossedAnkles(f: Figure, legs: Legs, tiltRad: number, seatFrontMm: number): Stance['legs'] {
   const [aside, rise] = [restKnee(f)[0], restKnee(f)[1]];
   const shinMm = rise - restAnkle(f)[1];
   const beyond = f.FB / 2 + AIR_MM / 2;
@@ -45,13 +53,21 @@ export function crossedShins(f: Figure, legs: Legs, tiltRad: number, seatFrontMm
   const back = least <= most ? Math.min(most, BACK_RAD) : -least;
   const apartMm = apartAtAnkles(f, shinMm, aside, beyond);
   const front = Math.asin(clamp(Math.sin(back) - apartMm / level, -0.85, 0));
-  const shinOf = (swing: number): ShinStance => {
+  const legOf = (swing: number): LegStance => {
     const lifted = Math.max(0, standsMm - level * Math.cos(swing)) + legs.heelGapMm;
     const toes = Math.min(TOES_DOWN_RAD, Math.asin(clamp(lifted / (0.72 * f.FL), 0, 1)));
     const footRad = tiltRad + Math.min(toes, swing + STRETCHED_RAD);
-    return { shinRad: tiltRad + swing, footRad, toesOutRad: -TOES_OUT_RAD, inwardRad };
+    return {
+      thighRad: legs.thighRad,
+      acrossRad: 0,
+      shinRad: tiltRad + swing,
+      footRad,
+      toesOutRad: -TOES_OUT_RAD,
+      inwardRad,
+      footInwardRad: 0,
+    };
   };
-  return [shinOf(front), shinOf(back)];
+  return [legOf(front), legOf(back)];
 }
 
 /** How far before the other an ankle must be for the shins to pass each other all the way down. */

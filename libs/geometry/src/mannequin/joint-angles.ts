@@ -1,7 +1,7 @@
 import { degrees } from '../units/angle.ts';
 import type { JointLimit, JointRanges } from './joint-ranges.ts';
 import type { MannequinPose } from './pose.ts';
-import { chestRad, direction, type ArmStance, type ShinStance, type Stance } from './stance.ts';
+import { chestRad, direction, type ArmStance, type LegStance, type Stance } from './stance.ts';
 import { clamp, dot, turnAboutX } from './vector.ts';
 
 type Motion = Pick<JointLimit, 'joint' | 'motion'>;
@@ -34,12 +34,14 @@ function armAngles(arm: ArmStance, stance: Stance): Omit<JointAngle, 'side'>[] {
   ];
 }
 
-function shinAngles(
-  { shinRad, footRad, inwardRad }: ShinStance,
-  { thighRad }: Stance,
+function legAngles(
+  { thighRad, acrossRad, shinRad, footRad, inwardRad }: LegStance,
+  { trunkRad, slumpRad }: Stance,
 ): Omit<JointAngle, 'side'>[] {
   const ankle = degrees(footRad - shinRad);
   return [
+    { joint: 'hip', motion: 'flexion', deg: 90 + degrees(trunkRad - slumpRad - thighRad) },
+    { joint: 'hip', motion: 'adduction', deg: degrees(acrossRad) },
     {
       joint: 'hip',
       motion: 'rotation',
@@ -58,10 +60,8 @@ function shinAngles(
  * @returns degrees, below 0 the other way
  */
 export function jointAngles({ stance }: Pick<MannequinPose, 'stance'>): JointAngle[] {
-  const { thighRad, shins, trunkRad, slumpRad } = stance;
-  const [left, right] = shins.map((shin) => shinAngles(shin, stance));
+  const [left, right] = stance.legs.map((leg) => legAngles(leg, stance));
   return [
-    { joint: 'hip', motion: 'flexion', deg: 90 + degrees(trunkRad - slumpRad - thighRad) },
     ...left!.flatMap((angle, i): JointAngle[] => {
       const other = right![i]!;
       return angle.deg === other.deg

@@ -11,7 +11,15 @@ const schema = z.strictObject({
   limits: z.array(
     z.strictObject({
       joint: z.enum(['shoulder', 'elbow', 'wrist', 'hip', 'knee', 'ankle']),
-      motion: z.enum(['flexion', 'extension', 'abduction', 'rotation', 'plantar flexion', 'dorsiflexion']),
+      motion: z.enum([
+        'flexion',
+        'extension',
+        'abduction',
+        'adduction',
+        'rotation',
+        'plantar flexion',
+        'dorsiflexion',
+      ]),
       deg: z.number().positive(),
       source,
     }),

@@ -1,7 +1,7 @@
 import type { Vec3 } from '../parts/part.ts';
 import { toRoom, type BodyPlacement } from './body-placement.ts';
 import type { Figure } from './figure.ts';
-import { legLine } from './leg-sections.ts';
+import { legLine, turnFoot } from './leg-line.ts';
 import {
   HIP_FORWARD_MM,
   HIP_HEIGHT_MM,
@@ -11,7 +11,7 @@ import {
   shoulderLineMm,
   type Stance,
 } from './stance.ts';
-import { add, along, turnAboutX, turnAboutY } from './vector.ts';
+import { add, along, turnAboutX } from './vector.ts';
 
 type Paired = 'shoulder' | 'elbow' | 'wrist' | 'fingertip' | 'hip' | 'knee' | 'ankle' | 'heel' | 'toe';
 
@@ -37,10 +37,8 @@ export function bodyJoints(f: Figure, stance: Stance, placement: BodyPlacement):
   const pair = (side: 'left' | 'right'): Record<Paired, Vec3> => {
     const n = side === 'left' ? 0 : 1;
     const arm = stance.arms[n];
-    const { footRad, toesOutRad } = stance.shins[n];
-    const leg = legLine(f, stance, n);
-    const foot = (p: Vec3): Vec3 =>
-      add(leg.ankle, turnAboutY(turnAboutX(p, [0, 0, 0], footRad), [0, 0, 0], toesOutRad));
+    const leg = legLine(f, stance.legs[n]);
+    const foot = (p: Vec3): Vec3 => add(leg.ankle, turnFoot(stance.legs[n], p));
     const flip = (p: Vec3): Vec3 => out(side === 'left' ? p : mirror(p));
     const sole = -f.MH - stance.shoeMm;
     return {

@@ -1,19 +1,9 @@
 import type { Vec3 } from '../parts/part.ts';
 import { LIMB_COLUMNS, type Cage } from './cage.ts';
 import type { Figure } from './figure.ts';
-import { HIP_FORWARD_MM, HIP_HEIGHT_MM, restAnkle, restKnee, type Stance } from './stance.ts';
-import {
-  add,
-  along,
-  clamp,
-  mix,
-  mixPoints,
-  scale,
-  sub,
-  turnAbout,
-  turnAboutX,
-  turnAboutY,
-} from './vector.ts';
+import { leanInwards, legBends } from './leg-line.ts';
+import { HIP_FORWARD_MM, restAnkle, restKnee, type LegStance, type Stance } from './stance.ts';
+import { add, along, clamp, mix, mixPoints, scale, sub, turnAboutX, turnAboutY } from './vector.ts';
 
 /**
  * Points of one limb ring: `across` and `up` are half axes, column 3 lies at `across`, column 1 at `up`.
@@ -117,33 +107,39 @@ function restLeg(
   };
 }
 
-/** Where the left knee and ankle come to lie, and how the sole stands. */
-export interface LegLine {
-  hip: Vec3;
-  knee: Vec3;
-  ankle: Vec3;
-}
-
-const FORWARDS: Vec3 = [0, 0, 1];
-
-/** Turns a point below a left knee towards the other leg. */
-export const leanInwards = (p: Vec3, knee: Vec3, angleRad: number): Vec3 =>
-  angleRad === 0 ? p : add(knee, turnAbout(sub(p, knee), FORWARDS, -angleRad));
-
-/** Joints of one leg in a stance, as if it were the left one; `side` 0 is the left, 1 the right. */
-export function legLine(f: Figure, stance: Stance, side: 0 | 1): LegLine {
-  const hipAxis: Vec3 = [0, HIP_HEIGHT_MM, HIP_FORWARD_MM];
-  const { shinRad, inwardRad } = stance.shins[side];
-  const rest = restKnee(f);
-  const knee = turnAboutX(rest, hipAxis, stance.thighRad);
-  const leant = leanInwards(sub(restAnkle(f), rest), [0, 0, 0], inwardRad);
-  const shin = turnAboutX(leant, [0, 0, 0], shinRad);
-  return { hip: [0.24 * f.HB, HIP_HEIGHT_MM, HIP_FORWARD_MM], knee, ankle: add(knee, shin) };
-}
-
 const FOOT_SHARE = [0.3, 0.5, 0.75, 1, 1, 1];
+/** Whatever belongs to the foot alone goes as this ring does. */
+const FOOT_RING = 12;
 /** How much of the turn of a thigh about its length its rings take, from the second to the knee. */
 const TURN_SHARE = [0, 0.4, 0.8];
+/** How much the first ring of a thigh takes of its lift and of its turn towards the other leg. */
+const ROOT_SHARE = 0.8;
+
+/** Carries a section point of a measured left leg, of rings 1 to 12, to where a stance has it. */
+function sectionMover(f: Figure, leg: LegStance): (ring: number, p: Vec3) => Vec3 {
+  const { hip, knee, ankle, across } = legBends(f, leg);
+  const kneeRest = restKnee(f);
+  const ankleRest = restAnkle(f);
+  const { thighRad, shinRad, footRad, toesOutRad, inwardRad, footInwardRad } = leg;
+  const onFoot = (p: Vec3, share: number): Vec3 => {
+    const lean = mix(inwardRad, footInwardRad, share);
+    const moved = leanInwards(add(ankle, sub(p, ankleRest)), ankle, lean);
+    const pitched = turnAboutX(moved, ankle, mix(shinRad, footRad, share));
+    return turnAboutY(pitched, ankle, toesOutRad * share);
+  };
+  const bent = (ring: number, p: Vec3): Vec3 => {
+    const inwards = inwardRad * (ring === 1 ? 0 : (TURN_SHARE[ring - 2] ?? 1));
+    if (ring <= 3) {
+      return leanInwards(turnAboutX(p, hip, thighRad * (ring === 1 ? ROOT_SHARE : 1)), knee, inwards);
+    }
+    if (ring <= 6) {
+      const angle = ring === 4 ? (thighRad + shinRad) / 2 : shinRad;
+      return turnAboutX(leanInwards(add(knee, sub(p, kneeRest)), knee, inwards), knee, angle);
+    }
+    return onFoot(p, FOOT_SHARE[ring - 7] ?? 1);
+  };
+  return (ring, p) => across(bent(ring, p), ring === 1 ? ROOT_SHARE : 1);
+}
 
 /**
  * Writes the section points of both legs into `points`, bent as the stance says.
@@ -155,33 +151,12 @@ const TURN_SHARE = [0, 0.4, 0.8];
  */
 export function writeLegs(f: Figure, stance: Stance, cage: Cage, points: Float64Array): void {
   const { rings, toe } = restLeg(f, stance);
-  const hipAxis: Vec3 = [0, HIP_HEIGHT_MM, HIP_FORWARD_MM];
-  const kneeRest = restKnee(f);
-  const ankleRest = restAnkle(f);
   for (const side of [0, 1] as const) {
-    const { shinRad, footRad, toesOutRad, inwardRad } = stance.shins[side];
-    const { knee, ankle } = legLine(f, stance, side);
-    const onFoot = (p: Vec3, share: number): Vec3 => {
-      const moved = leanInwards(add(ankle, sub(p, ankleRest)), ankle, inwardRad * (1 - share));
-      const pitched = turnAboutX(moved, ankle, mix(shinRad, footRad, share));
-      return turnAboutY(pitched, ankle, toesOutRad * share);
-    };
-    const place = (ring: number, p: Vec3): Vec3 => {
-      const inwards = inwardRad * (ring === 1 ? 0 : (TURN_SHARE[ring - 2] ?? 1));
-      if (ring <= 3) {
-        const lifted = turnAboutX(p, hipAxis, stance.thighRad * (ring === 1 ? 0.8 : 1));
-        return leanInwards(lifted, knee, inwards);
-      }
-      if (ring <= 6) {
-        const angle = ring === 4 ? (stance.thighRad + shinRad) / 2 : shinRad;
-        return turnAboutX(leanInwards(add(knee, sub(p, kneeRest)), knee, inwards), knee, angle);
-      }
-      return onFoot(p, FOOT_SHARE[ring - 7] ?? 1);
-    };
+    const moved = sectionMover(f, stance.legs[side]);
     const write = (id: number, [x, y, z]: Vec3): void => points.set([side === 0 ? x : -x, y, z], id * 3);
     rings.forEach((ring, r) => {
-      ring.forEach((p, c) => write(cage.legs[side][r + 1]![c]!, place(r + 1, p)));
+      ring.forEach((p, c) => write(cage.legs[side][r + 1]![c]!, moved(r + 1, p)));
     });
-    write(cage.toes[side], onFoot(toe, 1));
+    write(cage.toes[side], moved(FOOT_RING, toe));
   }
 }

@@ -7,7 +7,7 @@ import type { FigureMeans } from './figure.ts';
 import { readFigure } from './figure.ts';
 import { bodyJoints, type MannequinJoints } from './joints.ts';
 import { bodySegments, type MannequinSegment } from './segments.ts';
-import { crossedShins, sideBySide } from './crossed-legs.ts';
+import { crossedAnkles, sideBySide } from './crossed-legs.ts';
 import { legsFor, legsOnRail, type FootRail } from './leg-posture.ts';
 import { HIP_FORWARD_MM, type Stance } from './stance.ts';
 import type { PoseNote } from './pose-note.ts';
@@ -117,8 +117,8 @@ export function poseMannequin(input: {
   else if (choice.feet === 'rail') notes.push({ kind: 'rail-out-of-reach' });
   const crosses = choice.feet === 'ankles-crossed';
   if (crosses) notes.push({ kind: 'ankles-crossed' });
-  const shins = crosses
-    ? crossedShins(f, legs, tilt, situation.effectiveDepthMm - forward)
+  const bentLegs = crosses
+    ? crossedAnkles(f, legs, tilt, situation.effectiveDepthMm - forward)
     : sideBySide(legs);
   if (legs.heelGapMm > 0.5) notes.push({ kind: 'feet-hang', valueMm: legs.heelGapMm });
   if (legs.kneesLift) notes.push({ kind: 'knees-lift' });
@@ -136,8 +136,7 @@ export function poseMannequin(input: {
   const stance: Stance = {
     ...bend,
     headRad,
-    thighRad: legs.thighRad,
-    shins,
+    legs: bentLegs,
     arms,
     shoeMm,
     forefootMm: Math.min(input.forefootMm ?? FLAT_SOLE_MM, shoeMm),

@@ -1,9 +1,8 @@
-import type { Vec3 } from '../parts/part.ts';
 import type { Figure } from './figure.ts';
-import { legLine } from './leg-sections.ts';
+import { legLine, turnFoot } from './leg-line.ts';
 import { TOUCH, type SkinLevel } from './skin.ts';
 import type { Stance } from './stance.ts';
-import { dot, sub, turnAboutX, turnAboutY } from './vector.ts';
+import { dot, sub } from './vector.ts';
 
 /** Softly keeps a height above zero: far above it changes nothing, far below it gives nearly 0. */
 const soft = (height: number): number => (height + Math.sqrt(height * height + 9)) / 2;
@@ -16,11 +15,12 @@ const soft = (height: number): number => (height + Math.sqrt(height * height + 9
  */
 export function press(points: Float64Array, at: SkinLevel, figure: Figure, stance: Stance): void {
   const soles = ([0, 1] as const).map((n) => {
-    const { footRad, toesOutRad } = stance.shins[n];
-    const turnFoot = (p: Vec3): Vec3 => turnAboutY(turnAboutX(p, [0, 0, 0], footRad), [0, 0, 0], toesOutRad);
-    const up = turnFoot([0, 1, 0]);
-    const depth = dot(turnFoot([0, -figure.MH - stance.shoeMm, 0]), up);
-    return { ankle: legLine(figure, stance, n).ankle, up, depth };
+    const leg = stance.legs[n];
+    return {
+      ankle: legLine(figure, leg).ankle,
+      up: turnFoot(leg, [0, 1, 0]),
+      depth: -figure.MH - stance.shoeMm,
+    };
   });
   for (let v = 0; v < at.level.pointCount; v++) {
     const flags = at.touch[v]!;

@@ -1,7 +1,8 @@
 import type { Vec3 } from '../parts/part.ts';
 import { toRoom, type BodyPlacement } from './body-placement.ts';
 import type { Figure } from './figure.ts';
-import { leanInwards, legLine, thighRings } from './leg-sections.ts';
+import { leanInwards, legBends, turnFoot } from './leg-line.ts';
+import { thighRings } from './leg-sections.ts';
 import {
   bendPoint,
   bicepsTuck,
@@ -9,7 +10,6 @@ import {
   direction,
   elbowFlesh,
   HIP_FORWARD_MM,
-  HIP_HEIGHT_MM,
   kneeRadius,
   mirror,
   restAnkle,
@@ -21,7 +21,7 @@ import {
   type Stance,
 } from './stance.ts';
 import { chestFront, chestHalf, chestHeight, trunkLevels } from './trunk-profile.ts';
-import { add, along, clamp, cross, length, mix, sub, turnAboutX, turnAboutY, unit } from './vector.ts';
+import { add, along, clamp, cross, length, mix, sub, turnAboutX, unit } from './vector.ts';
 
 /** What a stretch of the body wears. */
 export type MannequinTag = 'head' | 'hand' | 'shoe' | 'suit';
@@ -53,20 +53,17 @@ export type MannequinSegment =
 type Ball = readonly [centre: Vec3, radius: number];
 type Stretch = readonly [tag: MannequinTag, name: string, from: Ball, to: Ball];
 
-const hipAxis: Vec3 = [0, HIP_HEIGHT_MM, HIP_FORWARD_MM];
-const ZERO: Vec3 = [0, 0, 0];
-
 /** Solids of one leg as if it were the left: top of the thigh, knee, calf and foot lie where the skin has them. */
 function legStretches(f: Figure, stance: Stance, side: 0 | 1): Stretch[] {
-  const { shinRad, footRad, toesOutRad, inwardRad } = stance.shins[side];
-  const { knee, ankle } = legLine(f, stance, side);
+  const leg = stance.legs[side];
+  const { thighRad, shinRad, footRad, toesOutRad, inwardRad } = leg;
+  const { hip, knee, ankle, across } = legBends(f, leg);
   const kneeRest = restKnee(f);
   const [first] = thighRings(f);
-  const onThigh = (p: Vec3): Vec3 => turnAboutX(p, hipAxis, stance.thighRad);
+  const onThigh = (p: Vec3): Vec3 => across(turnAboutX(p, hip, thighRad));
   const onShin = (p: Vec3): Vec3 =>
-    turnAboutX(leanInwards(add(knee, sub(p, kneeRest)), knee, inwardRad), knee, shinRad);
-  const onFoot = (p: Vec3): Vec3 =>
-    add(ankle, turnAboutY(turnAboutX([p[0], p[1], p[2] - FOOT_BACK_MM], ZERO, footRad), ZERO, toesOutRad));
+    across(turnAboutX(leanInwards(add(knee, sub(p, kneeRest)), knee, inwardRad), knee, shinRad));
+  const onFoot = ([x, y, z]: Vec3): Vec3 => add(across(ankle), turnFoot(leg, [x, y, z - FOOT_BACK_MM]));
   const cap = kneeRadius(f);
   const calf = (f.BKL - f.BPL - 7) / 2;
   const heel = 0.34 * f.FB;

@@ -16,13 +16,18 @@ export interface ArmStance {
   handBack: Vec3;
 }
 
-/** One leg below the knee, written as if it were the sitter's left one. */
-export interface ShinStance {
+/** One leg, written as if it were the sitter's left one. */
+export interface LegStance {
+  thighRad: number;
+  /** The whole leg turned towards the other one, about the body's upright through its hip joint. */
+  acrossRad: number;
   shinRad: number;
   footRad: number;
   toesOutRad: number;
-  /** Shin leaning towards the other leg, as the thigh turns outwards about its own length; the foot stays level. */
+  /** Shin leaning towards the other leg, as the thigh turns outwards about its own length. */
   inwardRad: number;
+  /** Foot leaning so; 0 where it stands. */
+  footInwardRad: number;
 }
 
 /**
@@ -34,8 +39,7 @@ export interface Stance {
   /** How far belt and chest bend against each other: the belt that much backwards, the chest forwards; 0 upright. */
   slumpRad: number;
   headRad: number;
-  thighRad: number;
-  shins: readonly [left: ShinStance, right: ShinStance];
+  legs: readonly [left: LegStance, right: LegStance];
   arms: readonly [left: ArmStance, right: ArmStance];
   /** Height of the shoe under the heel. */
   shoeMm: number;
@@ -166,13 +170,20 @@ export function measuringStance(f: Figure): Stance {
   const elbow = restElbow(f);
   const wrist = along(elbow, [0, 0, 1], armLinks(f).forearmMm);
   const arm: ArmStance = { shoulder, elbow, wrist, hand: [0, 0, 1], handBack: [0, 1, 0] };
-  const shin: ShinStance = { shinRad: 0, footRad: 0, toesOutRad: 0, inwardRad: 0 };
+  const leg: LegStance = {
+    thighRad: 0,
+    acrossRad: 0,
+    shinRad: 0,
+    footRad: 0,
+    toesOutRad: 0,
+    inwardRad: 0,
+    footInwardRad: 0,
+  };
   return {
     trunkRad: 0,
     slumpRad: 0,
     headRad: 0,
-    thighRad: 0,
-    shins: [shin, shin],
+    legs: [leg, leg],
     arms: [arm, arm],
     shoeMm: 0,
     forefootMm: 0,

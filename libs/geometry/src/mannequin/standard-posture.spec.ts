@@ -164,6 +164,7 @@ describe('bends of the joints', () => {
       'elbow flexion': 150,
       'wrist flexion': 80,
       'wrist extension': 70,
+      'hip adduction': 30,
       'hip flexion': 125,
       'knee flexion': 130,
       'hip rotation': 45,

@@ -1,7 +1,8 @@
 import type { Vec3 } from '../parts/part.ts';
 import { TRUNK_COLUMNS, type Cage } from './cage.ts';
 import type { Figure } from './figure.ts';
-import { HIP_FORWARD_MM, HIP_HEIGHT_MM, shoulderLineMm, bendPoint, chestRad, type Stance } from './stance.ts';
+import { hipJoint } from './leg-line.ts';
+import { HIP_FORWARD_MM, shoulderLineMm, bendPoint, chestRad, mirror, type Stance } from './stance.ts';
 import { clamp, mix, turnAboutX } from './vector.ts';
 
 /** A level ring: heights and depths at front, side and back, and half its width. */
@@ -179,10 +180,11 @@ export function writeTrunk(f: Figure, stance: Stance, cage: Cage, points: Float6
     neckBase,
     0.4 * giveBack,
   );
-  const hipAxis: Vec3 = [0, HIP_HEIGHT_MM, HIP_FORWARD_MM];
+  const hip = hipJoint(f);
+  /** The fold of a hip goes a little with its thigh. */
+  const onHip = (p: Vec3, n: 0 | 1): Vec3 => turnAboutX(p, hip, stance.legs[n].thighRad * THIGH_SHARE);
   const place = (ring: number, column: number, p: Vec3): Vec3 => {
-    if (ring === 0)
-      return column >= 1 && column <= 3 ? turnAboutX(p, hipAxis, stance.thighRad * THIGH_SHARE) : p;
+    if (ring === 0) return p;
     const leaned = bendPoint(f, stance, p, LEAN_SHARE[ring], SLUMP_SHARE[ring]);
     const share = ring < 8 ? 0 : ring === 8 ? 0.12 : ring === 9 ? 0.6 : 1;
     if (share === 0) return leaned;
@@ -195,8 +197,9 @@ export function writeTrunk(f: Figure, stance: Stance, cage: Cage, points: Float6
   rings.forEach((ring, r) => {
     ring.forEach((p, c) => {
       const q = place(r, c, p);
-      write(cage.trunk[r]![c]!, q);
-      if (c > 0 && c < 6) write(cage.trunk[r]![TRUNK_COLUMNS - c]!, [-q[0], q[1], q[2]]);
+      const sided = (n: 0 | 1): Vec3 => (r === 0 && c >= 1 && c <= 3 ? onHip(q, n) : q);
+      write(cage.trunk[r]![c]!, sided(0));
+      if (c > 0 && c < 6) write(cage.trunk[r]![TRUNK_COLUMNS - c]!, mirror(sided(1)));
     });
   });
   crown.forEach((p, i) => write(cage.crown[i]!, place(15, 0, p)));
