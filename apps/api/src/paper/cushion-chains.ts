@@ -1,6 +1,5 @@
-import { outlineBox } from '@settlewright/geometry';
+import { outlineBox, outlineStops } from '@settlewright/geometry';
 import { type Chain, chainDepth, chainWidth, drawChain } from './dimension-chain';
-import { outlineStops } from './outline-stops';
 import { chainSide, type CushionPlan, type PlanPlace } from './plan-place';
 import { PEN, type Sheet } from './sheet';
 

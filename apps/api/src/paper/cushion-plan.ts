@@ -1,4 +1,5 @@
 import {
+  MOST_CHAINED_CORNERS,
   offsetFault,
   offsetOutline,
   outlineBox,
@@ -9,7 +10,6 @@ import {
 } from '@settlewright/geometry';
 import { drawClothWay } from './cloth-way';
 import { drawChains, type PlanChains } from './cushion-chains';
-import { MOST_CHAINED_CORNERS } from './outline-stops';
 import { type CushionPlan, onPaper, type PlanPlace } from './plan-place';
 import { PEN, type Sheet } from './sheet';
 import { TakenSpace, type WordPlace } from './taken-space';

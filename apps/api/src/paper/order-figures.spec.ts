@@ -1,13 +1,12 @@
 import { describe, expect, it } from '@jest/globals';
 import fc from 'fast-check';
-import { CONSTRUCTIONS, type OutlineCorner, type Point2 } from '@settlewright/geometry';
+import { CONSTRUCTIONS, type OutlineCorner, outlineStops, type Point2 } from '@settlewright/geometry';
 import { TILE_OVERLAP_MM } from '@settlewright/geometry/export';
 import { jsPDF } from 'jspdf';
 import { create } from 'qrcode';
 import { fourWays, orderPack, ORDER_PAGE } from '../../test/factories/order-packs';
 import { edgeKinds, edgeProfile } from './edge-profiles';
 import { OrderPages } from './order-pages';
-import { outlineStops } from './outline-stops';
 import { Pack } from './pack';
 import { drawQrCode, qrCode } from './qr-code';
 import { type ShapeStyle, Sheet } from './sheet';

@@ -56,4 +56,27 @@ describe('the views of a cushion', () => {
     expect(wordThat(drawing.plan, 'front edge').text).toBe('front edge, camera side');
     expect(wordThat(drawing.plan, 'back edge').text).not.toContain('camera');
   });
+
+  it('say the corners of a notch, the inset of a taper and each round corner, the whole further out', () => {
+    const { spec, drawing } = drawn({
+      shape: {
+        frontInMm: { left: 0, right: 60 },
+        notches: [{ edge: 'back', fromMm: 300, widthMm: 200, depthMm: 150 }],
+        cornerRadiusMm: { backLeft: 0, backRight: 0, frontLeft: 50, frontRight: 50 },
+      },
+    });
+    const { widthMm: w, depthMm: d } = spec.finishedMm;
+    const said = drawing.plan.shapes.filter((shape) => shape.kind === 'dimension');
+    const values = said.map(({ valueMm }) => Math.round(valueMm));
+    for (const mm of [200, 60, w - 60, 150, d - 150]) expect(values).toContain(Math.round(mm));
+    expect(said.filter(({ label }) => label === 'R').map(({ valueMm }) => valueMm)).toEqual([50, 50]);
+    const whole = said.find(({ label }) => label === 'finished, seam to seam')!;
+    const taper = said.find(({ valueMm }) => Math.abs(valueMm - 60) < 0.1)!;
+    expect(whole.offsetMm).toBeLessThan(taper.offsetMm);
+  });
+
+  it('say nothing twice of a rectangle', () => {
+    const { drawing } = drawn({ tufting: { kind: 'none' } });
+    expect(drawing.plan.shapes.filter((shape) => shape.kind === 'dimension')).toHaveLength(2);
+  });
 });

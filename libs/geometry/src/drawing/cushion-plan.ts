@@ -4,16 +4,10 @@ import { fittingSize } from '../cushions/cushion-sizes.ts';
 import { closurePath } from '../cushions/making/edge-strip.ts';
 import { wearHatch, wearRectangle } from '../cushions/wear-hatch.ts';
 import { wearMark } from '../cushions/wear.ts';
-import {
-  outlineBox,
-  offsetFault,
-  offsetOutline,
-  outlinePoints,
-  type OutlineCorner,
-} from '../outlines/outline.ts';
+import { offsetFault, offsetOutline, outlinePoints, type OutlineCorner } from '../outlines/outline.ts';
 import { WELT_MM } from './cushion-views.ts';
-import { datumChain, dimensionChain } from './dimension-chain.ts';
 import { drawingOf, type Drawing, type DrawShape, type PagePoint } from './drawing.ts';
+import { isFar, planChains } from './plan-chains.ts';
 import { EDGE_WORDS, edgeWords, insetMm } from './plan-edges.ts';
 
 const BUTTON_RADIUS_MM = 11;
@@ -126,9 +120,6 @@ function closureShapes(spec: CushionSpec, labelMm: number): DrawShape[] {
   ];
 }
 
-/** A datum further off than this is named by its numbers alone, so that the cushion stays large. */
-const isFar = ({ datum }: CushionSpec, labelMm: number): boolean => datum.toSeamMm > 4 * labelMm;
-
 function wallShapes(spec: CushionSpec, labelMm: number): DrawShape[] {
   const { datum } = spec;
   const { widthMm: w, depthMm: d } = fittingSize(spec);
@@ -152,64 +143,4 @@ function wallShapes(spec: CushionSpec, labelMm: number): DrawShape[] {
       upright: true,
     },
   ];
-}
-
-function planChains(spec: CushionSpec, labelMm: number): DrawShape[] {
-  const { widthMm: w, depthMm: d } = fittingSize(spec);
-  const fromLeft = spec.datum.side === 'left';
-  const columns = spec.buttons.columns.map(({ fromSeamMm }) => fromSeamMm);
-  const pageStops = [0, ...columns.map((c) => (fromLeft ? w - c : c)), w].sort((a, b) => a - b);
-  const rows = [0, ...spec.buttons.rowsMm, d];
-  const { x0: left, x1: right, y0, y1 } = outlineBox(spec.outline);
-  const [back, front] = [d - y1, d - y0];
-  const shapes: DrawShape[] = [
-    {
-      kind: 'dimension',
-      from: [left, front],
-      to: [right, front],
-      offsetMm: -1.1 * labelMm,
-      valueMm: right - left,
-      label: 'finished, seam to seam',
-      labelLane: 0,
-    },
-    {
-      kind: 'dimension',
-      from: [left, front],
-      to: [left, back],
-      offsetMm: (columns.length > 0 ? 2.4 : 1.2) * labelMm,
-      valueMm: front - back,
-      labelLane: 0,
-    },
-  ];
-  if (columns.length === 0) return shapes;
-  shapes.push(
-    ...dimensionChain(pageStops, { at: (mm) => [mm, 0], offsetMm: 0.9 * labelMm, labelMm }),
-    ...dimensionChain(rows, { at: (mm) => [0, mm], offsetMm: -1.1 * labelMm, labelMm: labelMm / 2 }),
-  );
-  const { toSeamMm } = spec.datum;
-  const datumX = fromLeft ? w + toSeamMm : -toSeamMm;
-  const inwards = fromLeft ? -1 : 1;
-  const stops = spec.buttons.columns.map(({ fromDatumMm }) => fromDatumMm);
-  shapes.push(
-    ...datumChain(stops, {
-      at: (mm) => [datumX + inwards * mm, 0],
-      offsetMm: inwards * 2.1 * labelMm,
-      labelMm,
-      quiet: true,
-      ...(isFar(spec, labelMm) ? { drawnFromMm: toSeamMm - labelMm } : {}),
-    }),
-  );
-  if (toSeamMm > 0.5 && !isFar(spec, labelMm)) {
-    shapes.push({
-      kind: 'dimension',
-      from: [Math.min(datumX, fromLeft ? w : 0), d],
-      to: [Math.max(datumX, fromLeft ? w : 0), d],
-      offsetMm: -1.1 * labelMm,
-      valueMm: toSeamMm,
-      label: 'gap',
-      labelLane: toSeamMm < labelMm ? 1 : 0,
-      quiet: true,
-    });
-  }
-  return shapes;
 }

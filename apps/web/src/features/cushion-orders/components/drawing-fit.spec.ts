@@ -1,4 +1,12 @@
-import { cushionDrawing, formatLength, type DimensionShape } from '@settlewright/geometry';
+import {
+  addPiece,
+  chooseCushion,
+  cushionDrawing,
+  deriveCushions,
+  emptySetDocument,
+  formatLength,
+  type DimensionShape,
+} from '@settlewright/geometry';
 import { describe, expect, it } from 'vitest';
 import { CUSHIONS } from '../test/orders.ts';
 import { dimensionLine, fitDrawing, shownText, spreadWords, textWidthPx, wordBox } from './drawing-fit.ts';
@@ -29,6 +37,43 @@ describe('a cushion drawn in millimetres', () => {
       }
     }
   });
+
+  it.each([500, 340])(
+    'has every number of a notched, tapered, rounded one apart from the others at %i pixels',
+    (px) => {
+      const shape = {
+        frontInMm: { left: 120, right: 0 },
+        notches: [{ edge: 'back' as const, fromMm: 0, widthMm: 250, depthMm: 150 }],
+        cornerRadiusMm: { backLeft: 0, backRight: 0, frontLeft: 50, frontRight: 76.2 },
+      };
+      const { document } = addPiece(emptySetDocument(), 'bench');
+      const [first] = deriveCushions(document);
+      const spec = deriveCushions(chooseCushion(document, first!.key, { shape })).find(
+        ({ key }) => key === first!.key,
+      )!;
+      const { widthMm, depthMm } = spec.finishedMm;
+      const { plan } = cushionDrawing(spec, { labelMm: 0.1 * Math.max(widthMm, depthMm) });
+      for (const system of ['millimetres', 'feet-inches'] as const) {
+        const say = ({ valueMm, label = '' }: DimensionShape) =>
+          `${formatLength(valueMm, { system, roundTo: 8 })} ${label}`.trim();
+        const { at } = fitDrawing(plan, px, say);
+        const boxes = plan.shapes.flatMap((one) => {
+          if (one.kind !== 'dimension') return [];
+          const [x, y] = dimensionLine(one, at).middle;
+          const half = textWidthPx(say(one)) / 2;
+          return [{ said: say(one), left: x - half, right: x + half, top: y - 7, bottom: y + 7 }];
+        });
+        expect(boxes.length).toBeGreaterThan(8);
+        const meeting = boxes.flatMap((a, i) =>
+          boxes
+            .slice(i + 1)
+            .filter((b) => a.left < b.right && b.left < a.right && a.top < b.bottom && b.top < a.bottom)
+            .map((b) => `${a.said} and ${b.said}`),
+        );
+        expect(meeting).toEqual([]);
+      }
+    },
+  );
 
   it('says less where a page is narrow', () => {
     const [spec] = CUSHIONS;

@@ -1,6 +1,6 @@
-import { outlineBox, type OutlineCorner } from '@settlewright/geometry';
+import { outlineBox, type OutlineCorner } from '../outlines/outline.ts';
 
-/** Corners beyond this number stand in the table of the template alone: chains of them would not be read. */
+/** Corners beyond this number are left to the table of the template: chains of them would not be read. */
 export const MOST_CHAINED_CORNERS = 14;
 
 /** Where an outline has corners, for chains along the edges of the page; plan millimetres, rising. */
@@ -16,6 +16,8 @@ const SAME_MM = 0.4;
 /**
  * The stops that say an outline: across the page from the corners of its upper and of its lower half, up the page from
  * all. A side that has no more than its two ends says nothing.
+ *
+ * @param outline - anticlockwise, y up, millimetres
  */
 export function outlineStops(outline: readonly OutlineCorner[]): OutlineStops {
   const { x0, x1, y0, y1 } = outlineBox(outline);
