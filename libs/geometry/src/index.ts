@@ -81,6 +81,7 @@ export { roomCutFaces, type RoomCutFace } from './drawing/room-cut-faces.ts';
 export * from './drawing/drawing-scale.ts';
 export { VIEW_DIRECTIONS, type SetView, type ViewDirection } from './drawing/set-view.ts';
 export { cushionDrawing, type CushionDrawing } from './drawing/cushion-drawing.ts';
+export { spacesBetween } from './drawing/dimension-chain.ts';
 export { MOST_CHAINED_CORNERS, outlineStops } from './drawing/outline-stops.ts';
 export { pictureFromAbove } from './drawing/picture-from-above.ts';
 export { boardLines, type BoardLines } from './cushions/board-lines.ts';

@@ -1,4 +1,4 @@
-import { outlineBox, outlineStops } from '@settlewright/geometry';
+import { outlineBox, outlineStops, spacesBetween } from '@settlewright/geometry';
 import { type Chain, chainDepth, chainWidth, drawChain } from './dimension-chain';
 import { chainSide, type CushionPlan, type PlanPlace } from './plan-place';
 import { PEN, type Sheet } from './sheet';
@@ -22,12 +22,6 @@ export interface PlanChains {
   space: { above: number; below: number; left: number; right: number };
 }
 
-/** What lies between neighbouring stops, as whole steps. */
-export function spaces(stops: readonly number[], stepMm: number): number[] {
-  const rounded = stops.map((stop) => Math.round(stop / stepMm) * stepMm);
-  return rounded.slice(1).map((stop, index) => stop - (rounded[index] ?? 0));
-}
-
 /** Lays the chains out from the outline outwards: its corners, then its buttons, then the whole. */
 export function planChains(sheet: Sheet, plan: CushionPlan, place: PlanPlace): PlanChains {
   const { x, y, factor, format } = place;
@@ -41,7 +35,7 @@ export function planChains(sheet: Sheet, plan: CushionPlan, place: PlanPlace): P
     rest: Pick<Chain, 'direction' | 'outwards'> & { quiet?: boolean },
   ): Unplaced => ({
     stops: stops.map(on),
-    labels: spaces(
+    labels: spacesBetween(
       stops.map((stop) => Math.abs(stop - (stops[0] ?? 0))),
       place.stepMm,
     ).map(bare),

@@ -13,9 +13,10 @@ import {
   outlineBox,
   scaleWords,
   shopScales,
+  spacesBetween,
 } from '@settlewright/geometry';
 import { CHECK_BAR_MM, drawCheckBar } from './check-bar';
-import { type PlanChains, planChains, spaces } from './cushion-chains';
+import { type PlanChains, planChains } from './cushion-chains';
 import { closureWords, drawFactsColumn, FACTS_WIDTH_MM } from './cushion-facts';
 import { drawCushionPlan } from './cushion-plan';
 import { drawCushionFront, drawCushionSection } from './cushion-views';
@@ -167,7 +168,7 @@ function sumLines(cushion: SpecCushion, { units }: SpecPack): string[] {
   const step = lengthStep(units);
   const show = (mm: number) => formatLength(mm, { ...units, feet: false });
   const sum = (stops: readonly number[], whole: number) => {
-    const parts = spaces([0, ...stops, whole], step).map((mm) => bareLength(mm, units));
+    const parts = spacesBetween([0, ...stops, whole], step).map((mm) => bareLength(mm, units));
     return `${shortSum(parts)} = ${show(whole)}`;
   };
   const seam = cushion.kind === 'seat' ? 'back' : 'top';

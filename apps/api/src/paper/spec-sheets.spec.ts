@@ -1,12 +1,11 @@
 import { describe, expect, it } from '@jest/globals';
 import fc from 'fast-check';
 import { jsPDF } from 'jspdf';
-import { curveWords, scaleFor } from '@settlewright/geometry';
+import { curveWords, scaleFor, spacesBetween } from '@settlewright/geometry';
 import { CHECK_BAR_MM, drawCheckBar } from './check-bar';
 import { drawClothWay } from './cloth-way';
 import { type Chain, chainDepth, drawChain } from './dimension-chain';
 import { breakLines } from './paragraph';
-import { spaces } from './cushion-chains';
 import { Sheet, type TextStyle } from './sheet';
 import { runWords } from './spec-words';
 import { TakenSpace } from './taken-space';
@@ -128,7 +127,7 @@ describe('a chain of dimensions', () => {
         fc.array(fc.double({ min: 1, max: 400, noNaN: true }), { minLength: 1, maxLength: 20 }),
         (parts) => {
           const stops = parts.reduce<number[]>((at, part) => [...at, (at.at(-1) ?? 0) + part], [0]);
-          const shown = spaces(stops, step).reduce((sum, space) => sum + space, 0);
+          const shown = spacesBetween(stops, step).reduce((sum, space) => sum + space, 0);
           expect(shown).toBeCloseTo(Math.round((stops.at(-1) ?? 0) / step) * step, 6);
         },
       ),

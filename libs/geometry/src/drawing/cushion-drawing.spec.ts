@@ -79,4 +79,21 @@ describe('the views of a cushion', () => {
     const { drawing } = drawn({ tufting: { kind: 'none' } });
     expect(drawing.plan.shapes.filter((shape) => shape.kind === 'dimension')).toHaveLength(2);
   });
+
+  it.each([25.4 / 8, 1])('has chains whose numbers add up as they are read, in steps of %s mm', (stepMm) => {
+    const spec = deriveCushions(facing).find(({ kind }) => kind === 'back')!;
+    const { plan } = cushionDrawing(spec, { stepMm });
+    const inSteps = (mm: number) => Math.round(mm / stepMm);
+    const chains = plan.shapes.filter((shape) => shape.kind === 'dimension' && !shape.quiet && !shape.label);
+    const sums = new Map<string, number[]>();
+    for (const shape of chains) {
+      if (shape.kind !== 'dimension') continue;
+      const line = `${shape.from[0] === shape.to[0]} ${shape.offsetMm}`;
+      sums.set(line, [...(sums.get(line) ?? []), inSteps(shape.valueMm)]);
+    }
+    const whole = [spec.finishedMm.widthMm, spec.finishedMm.depthMm].map(inSteps);
+    const added = [...sums.values()].map((steps) => steps.reduce((sum, step) => sum + step, 0));
+    expect(added).toHaveLength(3);
+    for (const sum of added) expect(whole).toContain(sum);
+  });
 });

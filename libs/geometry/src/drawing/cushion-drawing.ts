@@ -18,10 +18,18 @@ export interface CushionDrawing {
  *
  * @param spec - the cushion
  * @param options.labelMm - length a number takes on the drawing; short stretches lift theirs to another lane
+ * @param options.stepMm - smallest step that lengths are shown in, so that the numbers of a chain add up as they are read
  * @returns three drawings, millimetres; numbers are left to the consumer
  */
-export function cushionDrawing(spec: CushionSpec, options: { labelMm?: number } = {}): CushionDrawing {
+export function cushionDrawing(
+  spec: CushionSpec,
+  options: { labelMm?: number; stepMm?: number } = {},
+): CushionDrawing {
   const { widthMm, depthMm } = spec.finishedMm;
   const labelMm = options.labelMm ?? 0.06 * Math.max(widthMm, depthMm);
-  return { plan: cushionPlan(spec, labelMm), front: cushionFront(spec), section: cushionSection(spec) };
+  return {
+    plan: cushionPlan(spec, labelMm, options.stepMm),
+    front: cushionFront(spec),
+    section: cushionSection(spec),
+  };
 }

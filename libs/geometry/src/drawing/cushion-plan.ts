@@ -13,7 +13,7 @@ import { EDGE_WORDS, edgeWords, insetMm } from './plan-edges.ts';
 const BUTTON_RADIUS_MM = 11;
 
 /** A cushion from above, back edge up: board lines, seams, zip, wall, buttons, words and chains. */
-export function cushionPlan(spec: CushionSpec, labelMm: number): Drawing {
+export function cushionPlan(spec: CushionSpec, labelMm: number, stepMm?: number): Drawing {
   const { widthMm: w, depthMm: d } = fittingSize(spec);
   const pageX = (fromSeam: number): number => (spec.datum.side === 'left' ? w - fromSeam : fromSeam);
   const shapes: DrawShape[] = [
@@ -39,7 +39,7 @@ export function cushionPlan(spec: CushionSpec, labelMm: number): Drawing {
       fill: 'paper',
     })),
     ...edgeWords(spec, labelMm),
-    ...planChains(spec, labelMm),
+    ...planChains(spec, labelMm, stepMm),
   ];
   return drawingOf(shapes, labelMm / 2);
 }

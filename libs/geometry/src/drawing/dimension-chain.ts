@@ -31,8 +31,21 @@ export interface ChainLine {
   offsetMm: number;
   labelMm: number;
   quiet?: true;
+  /** Smallest step that lengths are shown in: numbers then add up as they are read. */
+  stepMm?: number | undefined;
   /** For a datum far away: where the drawn line begins instead. */
   drawnFromMm?: number;
+}
+
+/**
+ * What lies between neighbouring stops. Running sizes are rounded, not the spaces: so these add up to the whole as shown.
+ *
+ * @param stops - distances along one line, millimetres
+ * @param stepMm - smallest step that lengths are shown in; nothing is rounded without
+ */
+export function spacesBetween(stops: readonly number[], stepMm?: number): number[] {
+  const shown = stepMm ? stops.map((stop) => Math.round(stop / stepMm) * stepMm) : stops;
+  return shown.slice(1).map((stop, i) => stop - shown[i]!);
 }
 
 /**
@@ -44,12 +57,16 @@ export interface ChainLine {
 export function dimensionChain(stops: readonly number[], line: ChainLine): DimensionShape[] {
   const stretches = stops.slice(1).map((to, i): [number, number] => [stops[i]!, to]);
   const lanes = labelLanes(stretches, line.labelMm);
+  const spaces = spacesBetween(
+    stops.map((stop) => stop - stops[0]!),
+    line.stepMm,
+  );
   return stretches.map(([from, to], i) => ({
     kind: 'dimension',
     from: line.at(from),
     to: line.at(to),
     offsetMm: line.offsetMm,
-    valueMm: to - from,
+    valueMm: spaces[i]!,
     labelLane: lanes[i]!,
     ...(line.quiet ? { quiet: true } : {}),
   }));

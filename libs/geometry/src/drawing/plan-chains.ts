@@ -18,6 +18,7 @@ export const isFar = ({ datum }: CushionSpec, labelMm: number): boolean => datum
 interface PlanFrame {
   spec: CushionSpec;
   labelMm: number;
+  stepMm: number | undefined;
   left: number;
   right: number;
   back: number;
@@ -29,11 +30,12 @@ interface PlanFrame {
  *
  * @param spec - of the cushion
  * @param labelMm - length of a number on the drawing
+ * @param stepMm - smallest step that lengths are shown in
  */
-export function planChains(spec: CushionSpec, labelMm: number): DimensionShape[] {
+export function planChains(spec: CushionSpec, labelMm: number, stepMm?: number): DimensionShape[] {
   const { depthMm: d } = fittingSize(spec);
   const { x0: left, x1: right, y0, y1 } = outlineBox(spec.outline);
-  const frame = { spec, labelMm, left, right, back: d - y1, front: d - y0 };
+  const frame = { spec, labelMm, stepMm, left, right, back: d - y1, front: d - y0 };
   const corners = cornerChains(frame);
   return [
     ...corners.above,
@@ -50,7 +52,7 @@ const rowsOf = (chain: readonly DimensionShape[]): number =>
   chain.length === 0 ? 0 : NEXT_ROW + LIFTED * Math.max(...chain.map(({ labelLane }) => labelLane));
 
 /** What is notched, tapered or drawn, from corner to corner. */
-function cornerChains({ spec, labelMm, right, front }: PlanFrame) {
+function cornerChains({ spec, labelMm, stepMm, right, front }: PlanFrame) {
   const { depthMm: d } = fittingSize(spec);
   const { above, below, upright } = outlineStops(spec.outline);
   const { datum } = spec;
@@ -59,12 +61,13 @@ function cornerChains({ spec, labelMm, right, front }: PlanFrame) {
       ? datum.toSeamMm + labelMm
       : 0;
   return {
-    above: dimensionChain(above, { at: (mm) => [mm, 0], offsetMm: 0.9 * labelMm, labelMm }),
-    below: dimensionChain(below, { at: (mm) => [mm, front], offsetMm: -1.1 * labelMm, labelMm }),
+    above: dimensionChain(above, { at: (mm) => [mm, 0], offsetMm: 0.9 * labelMm, labelMm, stepMm }),
+    below: dimensionChain(below, { at: (mm) => [mm, front], offsetMm: -1.1 * labelMm, labelMm, stepMm }),
     upright: dimensionChain(upright.map((y) => d - y).reverse(), {
       at: (mm) => [right, mm],
       offsetMm: 1.1 * labelMm + wallMm,
       labelMm: labelMm / 2,
+      stepMm,
     }),
   };
 }
@@ -123,7 +126,7 @@ function wholeSize({ spec, labelMm, left, right, back, front }: PlanFrame, rows:
 }
 
 /** Columns and rows of buttons from seam to seam, and columns from the wall. */
-function buttonChains({ spec, labelMm }: PlanFrame, rows: number): DimensionShape[] {
+function buttonChains({ spec, labelMm, stepMm }: PlanFrame, rows: number): DimensionShape[] {
   const { widthMm: w, depthMm: d } = fittingSize(spec);
   const { columns, rowsMm } = spec.buttons;
   if (columns.length === 0) return [];
@@ -138,11 +141,13 @@ function buttonChains({ spec, labelMm }: PlanFrame, rows: number): DimensionShap
       at: (mm) => [mm, 0],
       offsetMm: (0.9 + rows) * labelMm,
       labelMm,
+      stepMm,
     }),
     ...dimensionChain([0, ...rowsMm, d], {
       at: (mm) => [0, mm],
       offsetMm: -1.1 * labelMm,
       labelMm: labelMm / 2,
+      stepMm,
     }),
     ...datumChain(
       columns.map(({ fromDatumMm }) => fromDatumMm),

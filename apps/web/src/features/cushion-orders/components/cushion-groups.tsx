@@ -1,5 +1,6 @@
 import {
   cushionDrawing,
+  lengthStep,
   groupCushions,
   handednessOf,
   HANDEDNESS_WORDS,
@@ -56,8 +57,12 @@ function Group({
   const { widthMm, depthMm } = spec.finishedMm;
   const other = sizeTexts(spec.finishedMm, otherSystem(style));
   const drawing = useMemo(
-    () => cushionDrawing(spec, { labelMm: NUMBER_OF_WIDTH * Math.max(widthMm, depthMm) }),
-    [spec, widthMm, depthMm],
+    () =>
+      cushionDrawing(spec, {
+        labelMm: NUMBER_OF_WIDTH * Math.max(widthMm, depthMm),
+        stepMm: lengthStep(style),
+      }),
+    [spec, widthMm, depthMm, style],
   );
   const first = marks[0] ?? '';
   const seat = spec.kind === 'seat';
