@@ -7,7 +7,7 @@ import { wearMark } from '../cushions/wear.ts';
 import { offsetFault, offsetOutline, outlinePoints, type OutlineCorner } from '../outlines/outline.ts';
 import { WELT_MM } from './cushion-views.ts';
 import { drawingOf, type Drawing, type DrawShape, type PagePoint } from './drawing.ts';
-import { isFar, planChains } from './plan-chains.ts';
+import { planChains, wallBeside } from './plan-chains.ts';
 import { EDGE_WORDS, edgeWords, insetMm } from './plan-edges.ts';
 
 const BUTTON_RADIUS_MM = 11;
@@ -123,7 +123,8 @@ function closureShapes(spec: CushionSpec, labelMm: number): DrawShape[] {
 function wallShapes(spec: CushionSpec, labelMm: number): DrawShape[] {
   const { datum } = spec;
   const { widthMm: w, depthMm: d } = fittingSize(spec);
-  if (datum.meets === 'bench-end' || isFar(spec, labelMm)) return [];
+  const wall = wallBeside(spec, labelMm);
+  if (!wall) return [];
   const x = datum.side === 'left' ? w + datum.toSeamMm : -datum.toSeamMm;
   const beside = datum.side === 'left' ? labelMm / 2 : -labelMm / 2;
   return [
@@ -138,7 +139,7 @@ function wallShapes(spec: CushionSpec, labelMm: number): DrawShape[] {
     {
       kind: 'text',
       at: [x + beside, d / 2],
-      text: datum.wallMark ? `${EDGE_WORDS[datum.meets]} ${datum.wallMark}` : EDGE_WORDS[datum.meets],
+      text: datum.wallMark ? `${EDGE_WORDS[wall]} ${datum.wallMark}` : EDGE_WORDS[wall],
       anchor: 'middle',
       upright: true,
     },

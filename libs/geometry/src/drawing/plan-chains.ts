@@ -12,7 +12,12 @@ const LIFTED = 0.35;
 const LEADER = { across: 1.6, up: 0.75 };
 
 /** A datum further off than this is named by its numbers alone, so that the cushion stays large. */
-export const isFar = ({ datum }: CushionSpec, labelMm: number): boolean => datum.toSeamMm > 4 * labelMm;
+const isFar = ({ datum }: Pick<CushionSpec, 'datum'>, labelMm: number): boolean =>
+  datum.toSeamMm > 4 * labelMm;
+
+/** What a cushion stands beside where that is drawn: near it, and no mere end of a bench. */
+export const wallBeside = ({ datum }: CushionSpec, labelMm: number) =>
+  datum.meets === 'bench-end' || isFar({ datum }, labelMm) ? undefined : datum.meets;
 
 /** Where a cushion lies on the page, and which of its ends its columns are measured from. */
 interface PlanFrame {
@@ -56,10 +61,7 @@ function cornerChains({ spec, labelMm, stepMm, right, front }: PlanFrame) {
   const { depthMm: d } = fittingSize(spec);
   const { above, below, upright } = outlineStops(spec.outline);
   const { datum } = spec;
-  const wallMm =
-    datum.side === 'left' && datum.meets !== 'bench-end' && !isFar(spec, labelMm)
-      ? datum.toSeamMm + labelMm
-      : 0;
+  const wallMm = datum.side === 'left' && wallBeside(spec, labelMm) ? datum.toSeamMm + labelMm : 0;
   return {
     above: dimensionChain(above, { at: (mm) => [mm, 0], offsetMm: 0.9 * labelMm, labelMm, stepMm }),
     below: dimensionChain(below, { at: (mm) => [mm, front], offsetMm: -1.1 * labelMm, labelMm, stepMm }),

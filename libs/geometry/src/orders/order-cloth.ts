@@ -87,8 +87,8 @@ export function clothOfOrder(
     settings,
   );
   const usable = usableWidthMm(cloth);
-  const panels = all.filter((panel) => waysOf(panel, usable).length > 0);
-  const wide = all.filter((panel) => !panels.includes(panel));
+  const fits = (panel: ClothPanel) => waysOf(panel, usable).length > 0;
+  const wide = all.filter((panel) => !fits(panel));
   const unmade = covered.filter(({ making }) => !making).map(({ mark }) => mark);
   const whole = (cover.parts ?? COVER_PARTS).length === COVER_PARTS.length;
   const chartMm = whole
@@ -103,7 +103,7 @@ export function clothOfOrder(
     cover,
     marks: covered.map(({ mark }) => mark),
     cloth,
-    panels,
+    panels: all.filter(fits),
     chartMm,
     buyMm,
     ...(cost && { cost }),

@@ -1,9 +1,9 @@
 import {
   cushionDrawing,
-  lengthStep,
   groupCushions,
   handednessOf,
   HANDEDNESS_WORDS,
+  lengthStep,
   thicknessWords,
   type CushionGroup,
   type CushionSpec,
