@@ -1,6 +1,5 @@
 import type { Vec3 } from '../parts/part.ts';
 import type { Figure } from './figure.ts';
-import { thighSurface } from './leg-sections.ts';
 import { unbendPoint, type TrunkBend } from './stance.ts';
 import { trunkGap, trunkLevels, type TrunkLevel } from './trunk-profile.ts';
 import { mix, mixPoints } from './vector.ts';
@@ -14,28 +13,30 @@ export interface Rest {
   axis?: 0;
 }
 
+/** Height of the thighs over the seat, by sideways and forwards. */
+export type ThighTop = (x: number, z: number) => number;
+
 /** What an arm must keep clear of, worked out once for a body. */
 export interface Obstacles {
   figure: Figure;
   levels: readonly TrunkLevel[];
-  thighTop: (x: number, z: number) => number;
   bend: TrunkBend;
   shoulder: Vec3;
-  rest: Rest | undefined;
+  /** What the forearm lies on. */
+  under: Rest | ThighTop;
 }
 
 export const obstacles = (
   figure: Figure,
   bend: TrunkBend,
   shoulder: Vec3,
-  rest: Rest | undefined,
+  under: Rest | ThighTop,
 ): Obstacles => ({
   figure,
   levels: trunkLevels(figure),
-  thighTop: thighSurface(figure),
   bend,
   shoulder,
-  rest,
+  under,
 });
 
 const UPPER_SAMPLES = [0.5, 0.65, 0.8];
@@ -49,7 +50,8 @@ const AIR_MM = 3;
  * it is clear.
  */
 export function overlap(elbow: Vec3, wrist: Vec3, among: Obstacles): number {
-  const { figure, levels, thighTop, bend, shoulder, rest } = among;
+  const { figure, levels, bend, shoulder, under } = among;
+  const rest = typeof under === 'function' ? undefined : under;
   const { radius } = figure;
   let most = 0;
   const look = (p: Vec3, r: number): void => {
@@ -61,7 +63,7 @@ export function overlap(elbow: Vec3, wrist: Vec3, among: Obstacles): number {
     const p = mixPoints(elbow, wrist, t);
     const r = mix(t === 0 ? radius.elbow : radius.forearm, radius.wrist, t);
     look(p, r);
-    if (!rest) most = Math.max(most, thighTop(p[0], p[2]) + 0.9 * r - p[1]);
+    if (typeof under === 'function') most = Math.max(most, under(p[0], p[2]) + 0.9 * r - p[1]);
   }
   const across = rest?.axis ?? 2;
   if (rest && elbow[across] < rest.edgeMm && wrist[across] > rest.edgeMm) {

@@ -4,7 +4,8 @@ import type { PostureChoice } from '../room/posture-choice.ts';
 import { armLevel, armOnLap, armOnSill, armOnTable, armToCup } from './arm-stance.ts';
 import type { Figure } from './figure.ts';
 import type { PoseNote } from './pose-note.ts';
-import type { ArmStance, TrunkBend } from './stance.ts';
+import { lapUnder } from './lap.ts';
+import { kneesCross, type ArmStance, type Stance, type TrunkBend } from './stance.ts';
 
 /** What the arms may lie on, in the body frame. */
 export interface ArmRests {
@@ -38,26 +39,31 @@ export function sillsOf(sills: readonly Sill[], seatMm: number, leftMm: number):
 export function armsFor(
   f: Figure,
   bend: TrunkBend,
+  legs: Stance['legs'],
   rests: ArmRests,
   up: Vec3,
   choice: PostureChoice['arms'],
 ): { arms: readonly [left: ArmStance, right: ArmStance]; notes: PoseNote[] } {
-  const lap = (): ArmStance => armOnLap(f, bend);
+  const onLap = (side: 0 | 1): ArmStance => armOnLap(f, bend, lapUnder(f, legs, side));
+  const lap = (): readonly [left: ArmStance, right: ArmStance] => {
+    const left = onLap(0);
+    return [left, kneesCross({ legs }) ? onLap(1) : left];
+  };
   const level = choice === 'level';
   if (level) {
     const arm = armLevel(f, bend);
     return { arms: [arm, arm], notes: [{ kind: 'forearms-level' }] };
   }
   const table = choice === 'lap' ? undefined : rests.table && armOnTable(f, bend, rests.table, up);
-  const usual = table ?? lap();
+  const [left, right] = table ? [table, table] : lap();
   const kind = table ? 'forearms-on-table' : 'hands-on-lap';
   const notes: PoseNote[] = [{ kind }];
-  const without = { arms: [usual, usual] as const, notes };
+  const without = { arms: [left, right] as const, notes };
   if (choice === 'table' && !table) notes.push({ kind: 'table-out-of-reach' });
   if (choice === 'cup') {
     const cup = rests.table && armToCup(f, bend, rests.table, up);
     if (!cup) return { ...without, notes: [...notes, { kind: 'table-out-of-reach' }] };
-    return { arms: [usual, cup], notes: [{ kind, side: 'left' }, { kind: 'hand-to-cup' }] };
+    return { arms: [left, cup], notes: [{ kind, side: 'left' }, { kind: 'hand-to-cup' }] };
   }
   if (choice === 'sill-left' || choice === 'sill-right') {
     const side = choice === 'sill-left' ? 'left' : 'right';
@@ -65,7 +71,7 @@ export function armsFor(
     const arm = sill && armOnSill(f, bend, sill, up);
     if (!arm) return { ...without, notes: [...notes, { kind: 'sill-out-of-reach', side }] };
     return {
-      arms: side === 'left' ? [arm, usual] : [usual, arm],
+      arms: side === 'left' ? [arm, right] : [left, arm],
       notes: [
         { kind, side: side === 'left' ? 'right' : 'left' },
         { kind: 'forearm-on-sill', side },

@@ -1,8 +1,8 @@
 import type { Vec3 } from '../parts/part.ts';
 import type { Figure } from './figure.ts';
 import { reachFor, type Reach } from './limb-reach.ts';
-import { obstacles, overlap, type Rest } from './arm-clearance.ts';
-import { thighSurface } from './leg-sections.ts';
+import { obstacles, overlap, type Rest, type ThighTop } from './arm-clearance.ts';
+import type { Lap } from './lap.ts';
 import {
   armLinks,
   bendPoint,
@@ -13,7 +13,6 @@ import {
   type ArmStance,
   type TrunkBend,
 } from './stance.ts';
-import { bellyFront } from './trunk-profile.ts';
 import { add, along, cross, length, mix, sub, unit } from './vector.ts';
 
 const POLE: Vec3 = [0.15, -0.8, -0.6];
@@ -27,10 +26,10 @@ interface Wish {
 }
 
 /** The least turned and least stretched arm that is clear of trunk, back and table. */
-function bestReach(f: Figure, bend: TrunkBend, wishes: Wish[], rest?: Rest): Reach {
+function bestReach(f: Figure, bend: TrunkBend, wishes: Wish[], under: Rest | ThighTop): Reach {
   const shoulder = bendPoint(f, bend, restShoulder(f));
   const { upperMm, forearmMm } = armLinks(f);
-  const among = obstacles(f, bend, shoulder, rest);
+  const among = obstacles(f, bend, shoulder, under);
   let best: { reach: Reach; cost: number } | undefined;
   for (const { wrist, dislike } of wishes) {
     const straightness = length(sub(wrist, shoulder)) / (upperMm + forearmMm);
@@ -62,26 +61,34 @@ function armAt(f: Figure, bend: TrunkBend, reach: Reach, hand: Vec3, handBack: V
 const steps = (from: number, to: number, step: number): number[] =>
   Array.from({ length: Math.max(1, Math.floor((to - from) / step) + 1) }, (_, i) => from + i * step);
 
-/** Hands on the thighs, apart from each other, in front of the belly. */
-export function armOnLap(f: Figure, bend: TrunkBend): ArmStance {
+/**
+ * A hand on the thighs, before the belly.
+ *
+ * @param lap - what is under this hand
+ */
+export function armOnLap(f: Figure, bend: TrunkBend, lap: Lap): ArmStance {
   const kneeX = restKnee(f)[0];
-  const thighTop = thighSurface(f);
-  const height = (x: number, z: number): number => thighTop(x, z) + 0.9 * f.radius.wrist + 4;
-  const near = 0.62 * bellyFront(f);
-  const inmost = Math.max(1.05 * kneeX, 0.5 * f.Ha + 12);
-  const wishes = [1, 1.15, 1.3, 1.45].flatMap((out, i) =>
-    steps(near, f.BKL - 0.85 * f.Ha, 18).map((z): Wish => {
-      const x = out * inmost;
+  const { top, lineX, leastX, nearMm, farMm, mostInwards, fingersDownMm } = lap;
+  const height = (x: number, z: number): number => top(x, z) + 0.9 * f.radius.wrist + 4;
+  const wishes = [0, 0.15, 0.3, 0.45].flatMap((out, i) =>
+    steps(nearMm, farMm, 18).map((z): Wish => {
+      const x = Math.max(lineX(z) + 0.05 * kneeX, leastX) + out * Math.max(1.05 * kneeX, leastX);
       return { wrist: [x, height(x, z), z], dislike: 0.2 * i };
     }),
   );
-  const reach = bestReach(f, bend, wishes);
+  const reach = bestReach(f, bend, wishes, top);
   const wrist = reach.end;
-  const inwards = Math.min(0.28, (wrist[0] - 0.5 * f.Ha - 4) / f.Ha + 0.1) * f.Ha;
+  const inwards = Math.min(mostInwards, (wrist[0] - lap.fingersX(wrist[2] + f.Ha)) / f.Ha) * f.Ha;
   const aside = wrist[0] - inwards;
   const middle = height(mix(wrist[0], aside, 0.5), wrist[2] + 0.5 * f.Ha) - wrist[1];
   const tip = height(aside, wrist[2] + f.Ha) - wrist[1];
-  return armAt(f, bend, reach, [-inwards, Math.max(tip - 8, 2 * middle - 8), f.Ha], [0.12, 1, 0.1]);
+  return armAt(
+    f,
+    bend,
+    reach,
+    [-inwards, Math.max(tip, 2 * middle) - fingersDownMm, f.Ha],
+    [lap.slopeAt(mix(wrist[0], aside, 0.5), wrist[2] + 0.5 * f.Ha), 1, 0.1],
+  );
 }
 
 /** Wishes that an arm can reach, stretched all but straight. */

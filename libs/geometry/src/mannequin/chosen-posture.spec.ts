@@ -2,11 +2,14 @@ import { describe, expect, it } from 'vitest';
 import jointFile from '@settlewright/seed-data/joint-ranges.json' with { type: 'json' };
 import { percentilePeople } from '../../test/survey-like-people.ts';
 import { jointAngles, jointWarnings } from './joint-angles.ts';
+import { readFigure } from './figure.ts';
 import { readJointRanges } from './joint-ranges.ts';
 import { poseMannequin, type MannequinPose, type SeatPosture } from './pose.ts';
+import { kneeRadius } from './stance.ts';
 import type { PostureChoice } from '../room/posture-choice.ts';
 
 const [, woman] = percentilePeople([50])[0]!;
+const figure = readFigure(woman);
 const SHOE_MM = 25;
 const seatMm = woman.popliteal_height + SHOE_MM;
 const situation: SeatPosture = {
@@ -16,9 +19,14 @@ const situation: SeatPosture = {
   backTopMm: 1000,
   table: { topMm: seatMm + woman.elbow_rest_height + 30, overlapMm: 60 },
 };
-function sit(choice: PostureChoice | undefined, over: Partial<SeatPosture> = {}, liftMm = 0): MannequinPose {
+function sit(
+  choice: PostureChoice | undefined,
+  over: Partial<SeatPosture> = {},
+  liftMm = 0,
+  means = woman,
+): MannequinPose {
   return poseMannequin({
-    means: woman,
+    means,
     shoeMm: SHOE_MM,
     frame: { hipMm: [0, seatMm + liftMm, 135], facingRad: 0 },
     situation: { ...situation, ...over },
@@ -26,6 +34,9 @@ function sit(choice: PostureChoice | undefined, over: Partial<SeatPosture> = {},
     choice,
   });
 }
+const ranges = readJointRanges(jointFile);
+const apart = (pose: MannequinPose, a: keyof MannequinPose['joints'], b: keyof MannequinPose['joints']) =>
+  Math.hypot(...pose.joints[a].map((x, i) => x - pose.joints[b][i]!));
 const kinds = (pose: MannequinPose) => pose.notes.map(({ kind }) => kind);
 
 describe('a posture that somebody chose', () => {
@@ -91,9 +102,6 @@ describe('a posture that somebody chose', () => {
   });
 
   it('crosses the ankles: each foot beyond the other, links as long as before, nothing bent too far', () => {
-    const ranges = readJointRanges(jointFile);
-    const apart = (pose: MannequinPose, a: keyof MannequinPose['joints'], b: keyof MannequinPose['joints']) =>
-      Math.hypot(...pose.joints[a].map((x, i) => x - pose.joints[b][i]!));
     for (const liftMm of [0, -40, 60]) {
       const [usual, crossed] = [sit(undefined, {}, liftMm), sit({ feet: 'ankles-crossed' }, {}, liftMm)];
       expect(kinds(crossed)).toEqual(expect.arrayContaining(['ankles-crossed', 'not-as-checked']));
@@ -116,6 +124,72 @@ describe('a posture that somebody chose', () => {
         ['right', true],
       ]);
     }
+  });
+
+  it('lays one knee over the other: left over right, links as long as before, nothing bent too far', () => {
+    for (const liftMm of [0, -40, 60]) {
+      const [usual, crossed] = [sit(undefined, {}, liftMm), sit({ feet: 'knees-crossed' }, {}, liftMm)];
+      expect(kinds(crossed)).toEqual(expect.arrayContaining(['knees-crossed', 'not-as-checked']));
+      const { leftKnee, rightKnee, leftToe, rightToe, leftAnkle, rightAnkle } = crossed.joints;
+      expect(leftKnee[0]).toBeLessThan(-40);
+      expect(Math.abs(rightKnee[0])).toBeLessThan(1);
+      expect(leftKnee[1]).toBeGreaterThan(rightKnee[1] + 100);
+      expect(leftAnkle[0]).toBeLessThan(rightAnkle[0] - 80);
+      for (const side of ['left', 'right'] as const) {
+        for (const [from, to] of [
+          ['Hip', 'Knee'],
+          ['Knee', 'Ankle'],
+          ['Ankle', 'Toe'],
+        ] as const) {
+          const [a, b] = [`${side}${from}`, `${side}${to}`] as const;
+          expect(apart(crossed, a, b)).toBeCloseTo(apart(usual, a, b), 6);
+        }
+      }
+      expect(Math.min(leftToe[1], rightToe[1])).toBeGreaterThan(-1);
+      expect(jointWarnings(crossed, ranges)).toEqual([]);
+      const turned = jointAngles(crossed).filter(({ motion }) => motion === 'adduction');
+      expect(turned.map(({ side, deg }) => [side, deg > 5 && deg < 30])).toEqual([
+        ['left', true],
+        ['right', true],
+      ]);
+    }
+  });
+
+  it('has hands on the thigh that is up', () => {
+    const flat = sit({ arms: 'lap' });
+    const crossed = sit({ arms: 'lap', feet: 'knees-crossed' });
+    expect(crossed.joints.leftWrist[1]).toBeGreaterThan(flat.joints.leftWrist[1]);
+    expect(crossed.joints.rightWrist[1]).toBeGreaterThan(crossed.joints.leftKnee[1] + kneeRadius(figure));
+    expect(sit({ feet: 'knees-crossed' }).joints.leftWrist).toEqual(sit(undefined).joints.leftWrist);
+  });
+
+  it('crosses the knees of people of every stature', () => {
+    for (const [name, means] of percentilePeople([5, 25, 50, 75, 95])) {
+      const higher = means.popliteal_height - woman.popliteal_height;
+      expect([name, kinds(sit({ feet: 'knees-crossed' }, {}, higher, means))]).toEqual([
+        name,
+        expect.arrayContaining(['knees-crossed']),
+      ]);
+    }
+  });
+
+  it('says why knees do not cross, and leaves the legs as they were', () => {
+    const stays = (pose: MannequinPose, usual: MannequinPose) =>
+      expect(pose.stance.legs).toEqual(usual.stance.legs);
+    const low = sit({ feet: 'knees-crossed' }, {}, -150);
+    expect(kinds(low)).toEqual(expect.arrayContaining(['too-low-to-cross', 'knees-lift']));
+    stays(low, sit(undefined, {}, -150));
+    const stout = { ...woman, abdominal_extension_depth_sitting: 340 };
+    const full = sit({ feet: 'knees-crossed' }, {}, 0, stout);
+    expect(kinds(full)).toContain('too-full-to-cross');
+    stays(full, sit(undefined, {}, 0, stout));
+    const under = (mm: number) => ({ table: { ...situation.table!, undersideMm: seatMm + mm } });
+    expect(kinds(sit({ feet: 'knees-crossed' }, under(320)))).toContain('knees-crossed');
+    const meets = sit({ feet: 'knees-crossed' }, under(230));
+    expect(kinds(meets)).toContain('table-over-knees');
+    stays(meets, sit(undefined, under(230)));
+    const rail = { footRail: { topMm: 200, aheadOfHipMm: 470 }, ...under(230) };
+    expect(kinds(sit({ feet: 'knees-crossed' }, rail, 180))).toContain('feet-on-rail');
   });
 
   it('puts hanging feet on a rail under them, and says when there is none in reach', () => {

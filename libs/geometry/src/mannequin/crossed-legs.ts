@@ -1,6 +1,6 @@
 import type { Figure } from './figure.ts';
 import type { Legs } from './leg-posture.ts';
-import { restAnkle, restKnee, type LegStance, type Stance } from './stance.ts';
+import { MEASURED_LEG, restAnkle, restKnee, type LegStance, type Stance } from './stance.ts';
 import { clamp, mix } from './vector.ts';
 
 export const TOES_OUT_RAD = 0.12;
@@ -16,15 +16,7 @@ const HEEL_OFF_MM = 10;
 
 /** Both legs alike. */
 export function sideBySide({ thighRad, shinRad, footRad }: Legs): Stance['legs'] {
-  const leg: LegStance = {
-    thighRad,
-    acrossRad: 0,
-    shinRad,
-    footRad,
-    toesOutRad: TOES_OUT_RAD,
-    inwardRad: 0,
-    footInwardRad: 0,
-  };
+  const leg: LegStance = { ...MEASURED_LEG, thighRad, shinRad, footRad, toesOutRad: TOES_OUT_RAD };
   return [leg, leg];
 }
 
@@ -58,13 +50,12 @@ export function crossedAnkles(f: Figure, legs: Legs, tiltRad: number, seatFrontM
     const toes = Math.min(TOES_DOWN_RAD, Math.asin(clamp(lifted / (0.72 * f.FL), 0, 1)));
     const footRad = tiltRad + Math.min(toes, swing + STRETCHED_RAD);
     return {
+      ...MEASURED_LEG,
       thighRad: legs.thighRad,
-      acrossRad: 0,
       shinRad: tiltRad + swing,
       footRad,
       toesOutRad: -TOES_OUT_RAD,
       inwardRad,
-      footInwardRad: 0,
     };
   };
   return [legOf(front), legOf(back)];

@@ -64,7 +64,7 @@ export function thighSurface(f: Figure): (x: number, z: number) => number {
 }
 
 /** Sections of the left leg as measured: thigh along the seat, shin upright. Rings 1 to 12, then the toe. */
-function restLeg(
+export function restLeg(
   f: Figure,
   { shoeMm, forefootMm }: Pick<Stance, 'shoeMm' | 'forefootMm'>,
 ): { rings: Vec3[][]; toe: Vec3 } {
@@ -113,10 +113,11 @@ const FOOT_RING = 12;
 /** How much of the turn of a thigh about its length its rings take, from the second to the knee. */
 const TURN_SHARE = [0, 0.4, 0.8];
 /** How much the first ring of a thigh takes of its lift and of its turn towards the other leg. */
-const ROOT_SHARE = 0.8;
+export const ROOT_LIFT = 0.8;
+export const ROOT_ACROSS = 0.2;
 
 /** Carries a section point of a measured left leg, of rings 1 to 12, to where a stance has it. */
-function sectionMover(f: Figure, leg: LegStance): (ring: number, p: Vec3) => Vec3 {
+export function sectionMover(f: Figure, leg: LegStance): (ring: number, p: Vec3) => Vec3 {
   const { hip, knee, ankle, across } = legBends(f, leg);
   const kneeRest = restKnee(f);
   const ankleRest = restAnkle(f);
@@ -130,7 +131,7 @@ function sectionMover(f: Figure, leg: LegStance): (ring: number, p: Vec3) => Vec
   const bent = (ring: number, p: Vec3): Vec3 => {
     const inwards = inwardRad * (ring === 1 ? 0 : (TURN_SHARE[ring - 2] ?? 1));
     if (ring <= 3) {
-      return leanInwards(turnAboutX(p, hip, thighRad * (ring === 1 ? ROOT_SHARE : 1)), knee, inwards);
+      return leanInwards(turnAboutX(p, hip, thighRad * (ring === 1 ? ROOT_LIFT : 1)), knee, inwards);
     }
     if (ring <= 6) {
       const angle = ring === 4 ? (thighRad + shinRad) / 2 : shinRad;
@@ -138,7 +139,7 @@ function sectionMover(f: Figure, leg: LegStance): (ring: number, p: Vec3) => Vec
     }
     return onFoot(p, FOOT_SHARE[ring - 7] ?? 1);
   };
-  return (ring, p) => across(bent(ring, p), ring === 1 ? ROOT_SHARE : 1);
+  return (ring, p) => across(bent(ring, p), ring === 1 ? ROOT_ACROSS : 1);
 }
 
 /**

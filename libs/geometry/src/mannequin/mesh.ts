@@ -2,6 +2,7 @@ import { turnToRoom } from './body-placement.ts';
 import type { Cage } from './cage.ts';
 import type { FigureMeans } from './figure.ts';
 import { giveWay } from './give-way.ts';
+import { keepLegsApart } from './keep-apart.ts';
 import type { MannequinPose } from './pose.ts';
 import { press } from './press.ts';
 import type { MannequinTag } from './segments.ts';
@@ -203,6 +204,7 @@ export function mannequinMesh(
   const { drawn } = solvedFigure(pose.means);
   const points = skinPoints(at, fitCage(drawn, pose.stance));
   press(points, at, drawn, pose.stance);
+  keepLegsApart(points, at, drawn, pose.stance);
   giveWay(points, at, drawn, pose.stance);
   const normals = skinNormals(points, triangles);
 

@@ -4,6 +4,11 @@ export interface PoseNote {
     | 'feet-hang'
     | 'feet-on-rail'
     | 'ankles-crossed'
+    | 'knees-crossed'
+    /** Thighs or belly leave a knee no room to lie over the other. */
+    | 'too-full-to-cross'
+    | 'too-low-to-cross'
+    | 'table-over-knees'
     | 'rail-out-of-reach'
     | 'slides-forward'
     | 'knees-lift'

@@ -1,4 +1,4 @@
-import type { MeasureKey, PlaceSituation } from '@settlewright/anthropometry';
+import type { MeasureKey, PlaceSituation, PlaceTableSituation } from '@settlewright/anthropometry';
 import type { Vec3 } from '../parts/part.ts';
 import type { PostureChoice } from '../room/posture-choice.ts';
 import { armsFor, sillsOf } from './arm-posture.ts';
@@ -7,8 +7,8 @@ import type { FigureMeans } from './figure.ts';
 import { readFigure } from './figure.ts';
 import { bodyJoints, type MannequinJoints } from './joints.ts';
 import { bodySegments, type MannequinSegment } from './segments.ts';
-import { crossedAnkles, sideBySide } from './crossed-legs.ts';
-import { legsFor, legsOnRail, type FootRail } from './leg-posture.ts';
+import type { FootRail } from './leg-posture.ts';
+import { sittingLegs } from './sitting-legs.ts';
 import { HIP_FORWARD_MM, type Stance } from './stance.ts';
 import type { PoseNote } from './pose-note.ts';
 import { trunkFor, upOn } from './trunk-posture.ts';
@@ -28,7 +28,9 @@ export type SeatPosture = Pick<
   PlaceSituation,
   'effectiveDepthMm' | 'seatTiltRad' | 'backLeanRad' | 'backTopMm'
 > & {
-  table?: Pick<NonNullable<PlaceSituation['table']>, 'topMm' | 'overlapMm'> | undefined;
+  table?:
+    | (Pick<PlaceTableSituation, 'topMm' | 'overlapMm'> & Partial<Pick<PlaceTableSituation, 'undersideMm'>>)
+    | undefined;
   sills?:
     | readonly Pick<PlaceSituation['sills'][number], 'side' | 'topMm' | 'centreToEdgeMm' | 'usableDepthMm'>[]
     | undefined;
@@ -102,45 +104,38 @@ export function poseMannequin(input: {
   if (choice.trunk === 'upright' && situation.backTopMm !== undefined) notes.push({ kind: 'sits-upright' });
   if (choice.trunk === 'slumped') notes.push({ kind: 'slumps' });
 
-  const standing = legsFor(f, placement, shoeMm);
-  const { footRail } = situation;
-  const wantsRail = choice.feet === 'rail' || (choice.feet === undefined && standing.heelGapMm > 0.5);
-  const railed =
-    wantsRail && footRail
-      ? legsOnRail(f, placement, shoeMm, {
-          ...footRail,
-          aheadOfHipMm: footRail.aheadOfHipMm - aheadMm - forward,
-        })
-      : undefined;
-  const legs = railed ?? standing;
-  if (railed) notes.push({ kind: 'feet-on-rail' });
-  else if (choice.feet === 'rail') notes.push({ kind: 'rail-out-of-reach' });
-  const crosses = choice.feet === 'ankles-crossed';
-  if (crosses) notes.push({ kind: 'ankles-crossed' });
-  const bentLegs = crosses
-    ? crossedAnkles(f, legs, tilt, situation.effectiveDepthMm - forward)
-    : sideBySide(legs);
-  if (legs.heelGapMm > 0.5) notes.push({ kind: 'feet-hang', valueMm: legs.heelGapMm });
-  if (legs.kneesLift) notes.push({ kind: 'knees-lift' });
+  const { footRail, table } = situation;
+  const shoe = { shoeMm, forefootMm: Math.min(input.forefootMm ?? FLAT_SOLE_MM, shoeMm) };
+  const overLap = (heightMm: number, from: NonNullable<SeatPosture['table']>): Vec3 =>
+    toBody(placement, tableEdge(input.frame, from, heightMm, situation.effectiveDepthMm));
+  const edge = table && overLap(table.topMm, table);
+  const under = table?.undersideMm === undefined ? undefined : overLap(table.undersideMm, table);
+  const {
+    legs,
+    heelGapMm,
+    notes: legNotes,
+  } = sittingLegs(
+    f,
+    {
+      placement,
+      shoe,
+      footRail: footRail && { ...footRail, aheadOfHipMm: footRail.aheadOfHipMm - aheadMm - forward },
+      seatFrontMm: situation.effectiveDepthMm - forward,
+      table: under && { undersideMm: under[1], edgeMm: under[2] },
+    },
+    choice.feet,
+  );
+  notes.push(...legNotes);
 
-  const edge =
-    situation.table && toBody(placement, tableEdge(input.frame, situation.table, situation.effectiveDepthMm));
   const rests = {
     table: edge && { topMm: edge[1], edgeMm: edge[2] },
     sills: sillsOf(situation.sills ?? [], placement.originMm[1], leftMm),
   };
-  const { arms, notes: armNotes } = armsFor(f, bend, rests, upOn(tilt), choice.arms);
+  const { arms, notes: armNotes } = armsFor(f, bend, legs, rests, upOn(tilt), choice.arms);
   notes.push(...armNotes);
   if (Object.values(choice).some((value) => value !== undefined)) notes.push({ kind: 'not-as-checked' });
 
-  const stance: Stance = {
-    ...bend,
-    headRad,
-    legs: bentLegs,
-    arms,
-    shoeMm,
-    forefootMm: Math.min(input.forefootMm ?? FLAT_SOLE_MM, shoeMm),
-  };
+  const stance: Stance = { ...bend, headRad, legs, arms, ...shoe };
   const joints = bodyJoints(f, stance, placement);
   return {
     means,
@@ -151,7 +146,7 @@ export function poseMannequin(input: {
     notes,
     headTopMm: joints.crown[1],
     eyeMm: joints.eye[1],
-    heelGapMm: legs.heelGapMm,
+    heelGapMm,
   };
 }
 
@@ -164,12 +159,17 @@ function moved({ hipMm, facingRad }: SeatPoint, leftMm: number, aheadMm: number)
   };
 }
 
-/** The near edge of the table's top on the place's centreline, room frame. */
-function tableEdge(frame: SeatPoint, table: { topMm: number; overlapMm: number }, depthMm: number): Vec3 {
-  const forward = depthMm - table.overlapMm - HIP_FORWARD_MM;
+/** The near edge of the table, at a height, on the place's centreline, room frame. */
+function tableEdge(
+  frame: SeatPoint,
+  { overlapMm }: { overlapMm: number },
+  heightMm: number,
+  depthMm: number,
+): Vec3 {
+  const forward = depthMm - overlapMm - HIP_FORWARD_MM;
   return [
     frame.hipMm[0] + Math.sin(frame.facingRad) * forward,
-    table.topMm,
+    heightMm,
     frame.hipMm[2] + Math.cos(frame.facingRad) * forward,
   ];
 }

@@ -1,7 +1,7 @@
 import type { Figure } from './figure.ts';
 import { legLine, turnFoot } from './leg-line.ts';
 import { TOUCH, type SkinLevel } from './skin.ts';
-import type { Stance } from './stance.ts';
+import { kneesCross, type Stance } from './stance.ts';
 import { dot, sub } from './vector.ts';
 
 /** Softly keeps a height above zero: far above it changes nothing, far below it gives nearly 0. */
@@ -22,6 +22,7 @@ export function press(points: Float64Array, at: SkinLevel, figure: Figure, stanc
       depth: -figure.MH - stance.shoeMm,
     };
   });
+  const crossed = kneesCross(stance);
   for (let v = 0; v < at.level.pointCount; v++) {
     const flags = at.touch[v]!;
     if (flags === TOUCH.none) continue;
@@ -30,7 +31,7 @@ export function press(points: Float64Array, at: SkinLevel, figure: Figure, stanc
     const y = points[v * 3 + 1]!;
     const z = points[v * 3 + 2]!;
     if (flags & TOUCH.seat) points[v * 3 + 1] = soft(y);
-    if (flags & TOUCH.midline && side !== 0) points[v * 3] = side * soft(side * x);
+    if (!crossed && flags & TOUCH.midline && side !== 0) points[v * 3] = side * soft(side * x);
     if (flags & TOUCH.sole) {
       const { ankle, up, depth } = soles[side === -1 ? 1 : 0]!;
       const height = dot(sub([side * x, y, z], ankle), up) - depth;

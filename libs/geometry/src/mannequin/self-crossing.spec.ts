@@ -47,6 +47,18 @@ describe('a body does not run through itself where one can see it', () => {
     }
   });
 
+  it.each(builds())('%s: one knee over the other where they can, on the same seats', (_, means) => {
+    for (const liftMm of [0, -40, 60]) {
+      const mesh = seated(means, false, { arms: 'lap', feet: 'knees-crossed' }, liftMm);
+      expect(visibleCrossings(mesh, selfCrossings(mesh)).map(({ at }) => at.map(Math.round))).toEqual([]);
+    }
+  });
+
+  it.each(builds())('%s: on a seat so low that the thighs lift off it', (_, means) => {
+    const mesh = seated(means, false, { arms: 'lap' }, -150);
+    expect(visibleCrossings(mesh, selfCrossings(mesh)).map(({ at }) => at.map(Math.round))).toEqual([]);
+  });
+
   it('would see an arm pushed into the side', () => {
     const [, means] = builds()[7]!;
     const mesh = measuringMesh(means);

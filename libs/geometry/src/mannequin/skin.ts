@@ -15,7 +15,7 @@ import {
 import { writeTrunk } from './trunk-sections.ts';
 
 /** What a point of the skin rests against. */
-export const TOUCH = { none: 0, seat: 1, sole: 2, midline: 4 } as const;
+export const TOUCH = { none: 0, seat: 1, sole: 2, midline: 4, otherLeg: 8 } as const;
 
 /** What of the body gives way to an arm lying on it. */
 export const SOFT = { none: 0, trunk: 1, thigh: 2 } as const;
@@ -26,7 +26,7 @@ export interface SkinLevel {
   limit: SparseRows;
   /** `TOUCH` flags of every point. */
   touch: Uint8Array;
-  /** For every point: +1 for the sitter's left leg, -1 for the right, 0 elsewhere. */
+  /** For every point: +1 for the sitter's left leg, -1 for the right, 0 elsewhere and where both meet. */
   legSide: Int8Array;
   /** What of `SOFT` every point is. */
   soft: Uint8Array;
@@ -43,9 +43,11 @@ export interface Skin {
 
 const touchOfFace = (face: CageFace): number => {
   if (face.part === 'trunk') return face.strip === 0 ? TOUCH.seat : TOUCH.none;
-  if (face.region === 'leg' && face.strip <= 3) return TOUCH.seat | (face.strip >= 1 ? TOUCH.midline : 0);
-  if (face.region === 'shoe' && (face.part === 'cap' || face.strip >= 8)) return TOUCH.sole;
-  return TOUCH.none;
+  if (face.region === 'leg' && face.strip === 0) return TOUCH.seat | TOUCH.otherLeg;
+  if (face.region === 'leg' && face.strip <= 3) return TOUCH.seat | TOUCH.midline | TOUCH.otherLeg;
+  if (face.region === 'leg') return TOUCH.otherLeg;
+  if (face.region !== 'shoe') return TOUCH.none;
+  return face.part === 'cap' || face.strip >= 8 ? TOUCH.sole | TOUCH.otherLeg : TOUCH.otherLeg;
 };
 
 const softnessOf = ({ region, part, strip }: CageFace): number => {
@@ -55,7 +57,7 @@ const softnessOf = ({ region, part, strip }: CageFace): number => {
 
 function skinLevel(cage: Cage, level: Level, rows: SparseRows): SkinLevel {
   const touch = new Uint8Array(level.pointCount);
-  const legSide = new Int8Array(level.pointCount);
+  const legsOf = new Uint8Array(level.pointCount);
   const soft = new Uint8Array(level.pointCount);
   const leftLeg = new Set(cage.legs[0].slice(1).flat().concat(cage.toes[0]));
   const rightLeg = new Set(cage.legs[1].slice(1).flat().concat(cage.toes[1]));
@@ -64,14 +66,15 @@ function skinLevel(cage: Cage, level: Level, rows: SparseRows): SkinLevel {
     const side = face.corners.some((c) => leftLeg.has(c))
       ? 1
       : face.corners.some((c) => rightLeg.has(c))
-        ? -1
+        ? 2
         : 0;
     for (const v of quad) {
       touch[v]! |= touchOfFace(face);
       soft[v] = Math.max(soft[v]!, softnessOf(face));
-      if (side !== 0) legSide[v] = side;
+      legsOf[v]! |= side;
     }
   });
+  const legSide = Int8Array.from(legsOf, (legs) => (legs === 1 ? 1 : legs === 2 ? -1 : 0));
   // The armhole belongs to the arm as well: it stays where the sections put it.
   level.quads.forEach((quad, q) => {
     if (cage.faces[level.home[q]!.face]!.part === 'arm') for (const v of quad) soft[v] = SOFT.none;

@@ -164,31 +164,37 @@ export const restKnee = (f: Figure): Vec3 => [0.235 * f.HB + 6, kneeRadius(f), (
 /** Centre of the ankle with the shin upright. */
 export const restAnkle = (f: Figure): Vec3 => [0.235 * f.HB + 6, f.MH - f.PH, (f.BPL + f.BKL) / 2 - 4];
 
+/** Thigh along the seat, shin upright, foot level. */
+export const MEASURED_LEG: LegStance = {
+  thighRad: 0,
+  acrossRad: 0,
+  shinRad: 0,
+  footRad: 0,
+  toesOutRad: 0,
+  inwardRad: 0,
+  footInwardRad: 0,
+};
+
 /** Upright, arms hanging, forearms level, shins upright: the posture in which the measures are defined. */
 export function measuringStance(f: Figure): Stance {
   const shoulder = restShoulder(f);
   const elbow = restElbow(f);
   const wrist = along(elbow, [0, 0, 1], armLinks(f).forearmMm);
   const arm: ArmStance = { shoulder, elbow, wrist, hand: [0, 0, 1], handBack: [0, 1, 0] };
-  const leg: LegStance = {
-    thighRad: 0,
-    acrossRad: 0,
-    shinRad: 0,
-    footRad: 0,
-    toesOutRad: 0,
-    inwardRad: 0,
-    footInwardRad: 0,
-  };
   return {
     trunkRad: 0,
     slumpRad: 0,
     headRad: 0,
-    legs: [leg, leg],
+    legs: [MEASURED_LEG, MEASURED_LEG],
     arms: [arm, arm],
     shoeMm: 0,
     forefootMm: 0,
   };
 }
+
+/** Whether one leg lies over the other from the thigh on. */
+export const kneesCross = ({ legs }: Pick<Stance, 'legs'>): boolean =>
+  legs.some(({ acrossRad }) => acrossRad !== 0);
 
 /** Mirror image across the sitter's midplane. */
 export const mirror = (p: Vec3): Vec3 => [-p[0], p[1], p[2]];

@@ -160,7 +160,9 @@ function uprightHalf(f: Figure): { rings: Vec3[][]; crown: [Vec3, Vec3, Vec3] } 
 
 const LEAN_SHARE = [0, 0.25, 0.55, 0.8];
 const SLUMP_SHARE = [0, 0, 0.15, 0.45, 0.8];
-const THIGH_SHARE = 0.25;
+/** How much of a thigh's lift the lowest rings take, and their points from the front to the side. By eye. */
+const FOLD_SHARE = [0.6, 0.9, 0.7, 0.3];
+const FOLD_ACROSS = [1, 1, 1, 0.6];
 
 /**
  * Writes the section points of trunk and head into `points`, bent as the stance says.
@@ -181,8 +183,12 @@ export function writeTrunk(f: Figure, stance: Stance, cage: Cage, points: Float6
     0.4 * giveBack,
   );
   const hip = hipJoint(f);
-  /** The fold of a hip goes a little with its thigh. */
-  const onHip = (p: Vec3, n: 0 | 1): Vec3 => turnAboutX(p, hip, stance.legs[n].thighRad * THIGH_SHARE);
+  /** A fold above a thigh goes some way with it; at the midline with both. */
+  const folded = (p: Vec3, ring: number, column: number, n: 0 | 1): Vec3 => {
+    const [own, other] = [stance.legs[n].thighRad, stance.legs[n === 0 ? 1 : 0].thighRad];
+    const turned = column === 0 ? (own + other) / 2 : own;
+    return turnAboutX(p, hip, turned * (FOLD_SHARE[ring] ?? 0) * (FOLD_ACROSS[column] ?? 0));
+  };
   const place = (ring: number, column: number, p: Vec3): Vec3 => {
     if (ring === 0) return p;
     const leaned = bendPoint(f, stance, p, LEAN_SHARE[ring], SLUMP_SHARE[ring]);
@@ -197,9 +203,8 @@ export function writeTrunk(f: Figure, stance: Stance, cage: Cage, points: Float6
   rings.forEach((ring, r) => {
     ring.forEach((p, c) => {
       const q = place(r, c, p);
-      const sided = (n: 0 | 1): Vec3 => (r === 0 && c >= 1 && c <= 3 ? onHip(q, n) : q);
-      write(cage.trunk[r]![c]!, sided(0));
-      if (c > 0 && c < 6) write(cage.trunk[r]![TRUNK_COLUMNS - c]!, mirror(sided(1)));
+      write(cage.trunk[r]![c]!, folded(q, r, c, 0));
+      if (c > 0 && c < 6) write(cage.trunk[r]![TRUNK_COLUMNS - c]!, mirror(folded(q, r, c, 1)));
     });
   });
   crown.forEach((p, i) => write(cage.crown[i]!, place(15, 0, p)));

@@ -11,8 +11,8 @@ export const postureChoiceSchema = z.strictObject({
   trunk: z.enum(['back', 'upright', 'slumped']).optional(),
   /** `level`: hanging, forearms level, the posture in which bodies are measured. */
   arms: z.enum(['lap', 'table', 'cup', 'sill-left', 'sill-right', 'level']).optional(),
-  /** `ankles-crossed`: the left ankle before the right. */
-  feet: z.enum(['floor', 'rail', 'ankles-crossed']).optional(),
+  /** `ankles-crossed`: the left ankle before the right; `knees-crossed`: the left knee over the right. */
+  feet: z.enum(['floor', 'rail', 'ankles-crossed', 'knees-crossed']).optional(),
   /** Moved from where the place puts the sitter: to the sitter's left, and forwards; millimetres. */
   nudge: z.strictObject({ leftMm: nudge, aheadMm: nudge }).optional(),
 });

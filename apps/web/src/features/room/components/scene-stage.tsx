@@ -21,10 +21,7 @@ import type { RoomPicture } from '../picture.ts';
 import { useSurroundings } from '../room-context.tsx';
 import { isBehind, isBodyLeft, isToScale } from '../scene/views.ts';
 import { SectionBar } from '../section/section-bar.tsx';
-import { SectionOnScene } from '../section/section-on-scene.tsx';
 import { settledDocument, useIsMoving, useRoom } from '../store.ts';
-import { LensMask } from '../views/lens-mask.tsx';
-import { LensOnPlan } from '../views/lens-on-plan.tsx';
 import { useOfferPresentView, useSeen } from '../views/use-seen.ts';
 import { viewTitle } from '../views/view-title.ts';
 import { useHandForm } from '../together/hand-form.ts';
@@ -32,8 +29,6 @@ import { HiddenNote } from '../together/hidden-note.tsx';
 import { TapeBar } from '../tape-tool/tape-bar.tsx';
 import { linesOnScene, useMeasures, useMeasuringScene } from '../tape-tool/use-measuring.ts';
 import { useTapeHand } from '../tape-tool/use-tape-hand.ts';
-import { GapsOnScene } from '../touching/gaps-on-scene.tsx';
-import { WayOnScene } from '../ways/way-on-scene.tsx';
 import { EyeMark } from './eye-mark.tsx';
 import { SceneErrorBoundary } from './scene-error-boundary.tsx';
 import { ScaleBar } from './scale-bar.tsx';
@@ -52,6 +47,7 @@ const NOBODY: RoomPicture['bodies'] = [];
 
 const SceneCanvas = lazy(() => import('../scene/scene-canvas.tsx'));
 const HandleLayer = lazy(() => import('../handles/handle-layer.tsx'));
+const SceneLayers = lazy(() => import('./scene-layers.tsx'));
 
 interface Props {
   picture: RoomPicture;
@@ -216,15 +212,9 @@ export function SceneStage({ picture, piece, address, actions, several, onOpenCe
             />
           </Suspense>
         )}
-        {!isMoving && <WayOnScene controller={view.controller} labels={labels} style={style} />}
-        {!clientView && !isMoving && (
-          <GapsOnScene controller={view.controller} cut={view.cut} style={style} />
-        )}
-        <SectionOnScene picture={picture} controller={view.controller} />
-        {view.lensBox && <LensMask box={view.lensBox} />}
-        {letter === 'D' && seen.lens && (
-          <LensOnPlan controller={view.controller} lens={seen.lens} style={style} />
-        )}
+        <Suspense fallback={null}>
+          <SceneLayers picture={picture} view={view} seen={seen} labels={labels} clientView={clientView} />
+        </Suspense>
         <div
           ref={readOut}
           hidden

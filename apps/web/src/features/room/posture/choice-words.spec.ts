@@ -8,6 +8,7 @@ it('says a chosen posture, each part in its own words, and to which side somebod
     'upright, off the back, right forearm on the sill, feet on the rail',
   );
   expect(sayChoice({ feet: 'ankles-crossed' }, inches)).toBe('ankles crossed');
+  expect(sayChoice({ feet: 'knees-crossed' }, inches)).toBe('one knee over the other');
   expect(sayChoice({ nudge: { leftMm: -25.4, aheadMm: 50.8 } }, inches)).toBe(
     'moved 1″ to the sitter’s right, moved 2″ forward',
   );

@@ -19,6 +19,7 @@ const FEET_WORDS = {
   floor: 'Feet on the floor or hanging',
   rail: 'Feet on the rail',
   'ankles-crossed': 'Ankles crossed',
+  'knees-crossed': 'One knee over the other',
 } as const;
 
 /** "1½″ to the sitter’s left, 1″ back". */

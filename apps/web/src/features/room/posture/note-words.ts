@@ -19,6 +19,14 @@ export function sayNote({ kind, valueMm = 0, side }: PoseNote, style: LengthStyl
       return 'feet on the rail';
     case 'ankles-crossed':
       return 'ankles crossed';
+    case 'knees-crossed':
+      return 'one knee over the other';
+    case 'too-full-to-cross':
+      return 'knees not crossed: too full about the thighs or the belly to lay one over the other';
+    case 'too-low-to-cross':
+      return 'knees not crossed: the seat is too low, the thighs lift off it already';
+    case 'table-over-knees':
+      return 'knees not crossed: the table leaves no room for a raised knee';
     case 'rail-out-of-reach':
       return 'no rail in reach of the feet';
     case 'sits-upright':

@@ -43,7 +43,8 @@ export function PostureForm({ picture, body }: Props) {
   const choice = seat?.posture ?? {};
   const { refused, feetHang } = useMemo(() => {
     const why = (part: PostureChoice) => refusalOf(body, part);
-    const refused = new Map<string, PoseNote | undefined>([['rail', why({ feet: 'rail' })]]);
+    const refused = new Map<string, PoseNote | undefined>();
+    for (const feet of ['rail', 'knees-crossed'] as const) refused.set(feet, why({ feet }));
     for (const arms of ['table', 'cup', 'sill-left', 'sill-right'] as const) refused.set(arms, why({ arms }));
     return { refused, feetHang: body.pose.heelGapMm > 0.5 };
   }, [body]);
@@ -101,6 +102,7 @@ export function PostureForm({ picture, body }: Props) {
           { value: 'floor', words: feetHang ? 'Hanging' : 'On the floor, hanging where they do not reach' },
           { value: 'rail', words: 'On the rail', ...detailOf('rail') },
           { value: 'ankles-crossed', words: 'Ankles crossed' },
+          { value: 'knees-crossed', words: 'One knee over the other', ...detailOf('knees-crossed') },
         ]}
         onChange={(value) => ask(value, { feet: value === USUAL ? undefined : value })}
       />

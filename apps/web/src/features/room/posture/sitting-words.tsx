@@ -1,4 +1,4 @@
-import { jointWarnings, readJointRanges, type JointWarning } from '@settlewright/geometry';
+import { jointWarnings, readJointRanges, type JointWarning, type PoseNote } from '@settlewright/geometry';
 import children from '@settlewright/seed-data/populations/children.json';
 import jointFile from '@settlewright/seed-data/joint-ranges.json';
 import { SOURCE_MARK_WORDS } from '@settlewright/anthropometry';
@@ -9,6 +9,9 @@ import { sayMeasuredAs } from './choice-words.ts';
 import { sayNote } from './note-words.ts';
 
 const RANGES = readJointRanges(jointFile);
+
+/** Notes that say already where the feet are. */
+const FEET_SAID: readonly PoseNote['kind'][] = ['feet-on-rail', 'ankles-crossed', 'knees-crossed'];
 
 const sayWarning = ({ joint, motion, side, deg, limitDeg, source }: JointWarning): string =>
   `${side ? `${side} ` : ''}${joint} ${motion} ${Math.round(deg)}°, beyond the ${limitDeg}° that most people manage (${source.cite}; ${SOURCE_MARK_WORDS[source.mark]})`;
@@ -28,8 +31,7 @@ export function SittingWords({ body }: { body: SeatedBody }) {
   const words = [
     ...(leans ? [] : ['sits against the back']),
     ...notes.map((note) => sayNote(note, style)),
-    ...(body.pose.heelGapMm > 0.5 ||
-    notes.some(({ kind }) => kind === 'feet-on-rail' || kind === 'ankles-crossed')
+    ...(body.pose.heelGapMm > 0.5 || notes.some(({ kind }) => FEET_SAID.includes(kind))
       ? []
       : ['feet on the floor']),
     'head level',

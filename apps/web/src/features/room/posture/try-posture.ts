@@ -6,6 +6,9 @@ const REFUSALS: readonly PoseNote['kind'][] = [
   'table-out-of-reach',
   'sill-out-of-reach',
   'rail-out-of-reach',
+  'too-full-to-cross',
+  'too-low-to-cross',
+  'table-over-knees',
 ];
 
 /** Why a choice cannot be had at a place; `undefined` where it can. */

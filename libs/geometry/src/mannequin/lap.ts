@@ -1,0 +1,122 @@
+import type { Figure } from './figure.ts';
+import { hipJoint, legLine } from './leg-line.ts';
+import { ROOT_ACROSS, ROOT_LIFT, thighRings, thighSurface } from './leg-sections.ts';
+import { kneesCross, restKnee, type LegStance, type Stance } from './stance.ts';
+import { bellyFront } from './trunk-profile.ts';
+import { clamp, mix } from './vector.ts';
+
+/** What one hand can lie on, as if it were the left one: sideways from the midline, forward of the rearmost buttock. */
+export interface Lap {
+  /** Height of the thighs over the seat. */
+  top: (x: number, z: number) => number;
+  /** The line on which hands lie. */
+  lineX: (z: number) => number;
+  /** How near to the midline a wrist may come. */
+  leastX: number;
+  /** How far forward a wrist may lie. */
+  nearMm: number;
+  farMm: number;
+  /** Where fingertips would lie, and how far inwards a hand turns for it at most, in shares of its length. */
+  fingersX: (z: number) => number;
+  mostInwards: number;
+  /** How much lower fingers end than what is under them. */
+  fingersDownMm: number;
+  /** How much the back of a hand tilts outwards, as a slope. */
+  slopeAt: (x: number, z: number) => number;
+}
+
+/** Hands on crossed knees, in shares of a hand's length: how far before the knee each wrist lies, and the left one aside. */
+const ON_KNEE = [0.9, 0.5];
+const CLEAR_OF_KNEE = 1.6;
+const ASIDE = 0.1;
+/** How near to the belly a left wrist may lie, in shares of how far that stands out; what it is crowded by goes aside. */
+const BEFORE_BELLY = 0.78;
+const CROWDED_ASIDE = 0.2;
+const FINGERS_DOWN = 0.12;
+
+/** A thigh as it lies in a stance: its upper side, and its middle line. */
+interface Thigh {
+  top: (x: number, z: number) => number;
+  lineX: (z: number) => number;
+}
+
+/** Upper side of a bent left thigh; `-Infinity` beside it. */
+function bentThigh(f: Figure, { thighRad, acrossRad }: LegStance): Thigh {
+  const rest = thighSurface(f);
+  const [first, second, third] = thighRings(f);
+  const [hipX, hipY, hipZ] = hipJoint(f);
+  // A bent knee rises no further than its middle.
+  const kneeZ = restKnee(f)[2];
+  const middle = (z: number): { x: number; half: number } => {
+    const [from, to] = z < second.z ? [first, second] : [second, third];
+    const t = clamp((z - from.z) / (to.z - from.z), 0, 1);
+    return { x: mix(from.centreX, to.centreX, t), half: mix(from.half, to.half, t) };
+  };
+  const free = (z: number): number => clamp((z - first.z) / (second.z - first.z), 0, 1);
+  const across = (z: number): number => acrossRad * mix(ROOT_ACROSS, 1, free(z));
+  return {
+    lineX: (z) => middle(z).x - (z - hipZ) * Math.tan(across(z)),
+    top: (x, z) => {
+      const turn = across(z);
+      const lift = -thighRad * mix(ROOT_LIFT, 1, free(z));
+      const [c, s] = [Math.cos(turn), Math.sin(turn)];
+      // The place before the leg turned towards the other, then before it rose.
+      const x0 = hipX + (x - hipX) * c + (z - hipZ) * s;
+      const ahead = (z - hipZ) * c - (x - hipX) * s;
+      let along = hipZ + ahead;
+      if (Math.abs(x0 - middle(hipZ + ahead).x) > first.half * 1.2) return -Infinity;
+      for (let i = 0; i < 2; i++) {
+        along = hipZ + (ahead + (rest(x0, along) - hipY) * Math.sin(lift)) / Math.cos(lift);
+        along = Math.min(along, kneeZ);
+      }
+      const { x: centreX, half } = middle(along);
+      if (Math.abs(x0 - centreX) > half) return -Infinity;
+      return hipY + (rest(x0, along) - hipY) * Math.cos(lift) + (along - hipZ) * Math.sin(lift);
+    },
+  };
+}
+
+/**
+ * The lap under one hand.
+ *
+ * @param f - the figure
+ * @param legs - how both legs lie
+ * @param side - 0 the left hand, 1 the right
+ * @returns heights and lines as if the hand were the left one, millimetres. On crossed knees the left hand lies on the
+ * thigh that is up, the right one on its knee
+ */
+export function lapUnder(f: Figure, legs: Stance['legs'], side: 0 | 1): Lap {
+  const rest = thighSurface(f);
+  const [own, other] = [bentThigh(f, legs[side]), bentThigh(f, legs[side === 0 ? 1 : 0])];
+  const near = 0.62 * bellyFront(f);
+  if (!kneesCross({ legs })) {
+    const top = (x: number, z: number): number => Math.max(rest(x, z), own.top(x, z));
+    const kneeX = restKnee(f)[0];
+    return {
+      top: legs[side].thighRad === 0 ? rest : top,
+      lineX: () => kneeX,
+      leastX: 0.5 * f.Ha + 12,
+      nearMm: near,
+      farMm: f.BKL - 0.85 * f.Ha,
+      fingersX: () => 0.4 * f.Ha + 4,
+      mostInwards: 0.28,
+      fingersDownMm: 8,
+      slopeAt: () => 0.12,
+    };
+  }
+  const top = (x: number, z: number): number => Math.max(rest(x, z), own.top(x, z), other.top(-x, z));
+  const kneeZ = legLine(f, legs[0]).knee[2];
+  const slopeAt = (x: number, z: number): number => 0.12 + (top(x - 12, z) - top(x + 12, z)) / 24;
+  const anyhow = { top, leastX: -Infinity, mostInwards: 0.6, slopeAt };
+  if (side === 0) {
+    const farBack = kneeZ - CLEAR_OF_KNEE * f.Ha;
+    const nearMm = BEFORE_BELLY * bellyFront(f);
+    const farMm = Math.max(nearMm, farBack);
+    const aside = ASIDE * f.Ha + CROWDED_ASIDE * (farMm - farBack);
+    const lineX = (z: number): number => own.lineX(z) + aside;
+    return { ...anyhow, lineX, fingersX: lineX, nearMm, farMm, fingersDownMm: 8 };
+  }
+  const lineX = (z: number): number => -other.lineX(z);
+  const [nearMm, farMm] = ON_KNEE.map((before) => kneeZ - before * f.Ha) as [number, number];
+  return { ...anyhow, lineX, fingersX: lineX, nearMm, farMm, fingersDownMm: FINGERS_DOWN * f.Ha };
+}

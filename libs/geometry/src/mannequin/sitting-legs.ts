@@ -1,0 +1,47 @@
+import type { PostureChoice } from '../room/posture-choice.ts';
+import type { BodyPlacement } from './body-placement.ts';
+import { crossedAnkles, sideBySide } from './crossed-legs.ts';
+import type { Figure } from './figure.ts';
+import { crossedKnees, type TableOver } from './knee-over-knee.ts';
+import { legsFor, legsOnRail, type FootRail, type Legs } from './leg-posture.ts';
+import type { PoseNote } from './pose-note.ts';
+import type { Stance } from './stance.ts';
+
+/** What of a place bends the legs, as the body has it. */
+interface Before {
+  placement: BodyPlacement;
+  shoe: Pick<Stance, 'shoeMm' | 'forefootMm'>;
+  footRail: FootRail | undefined;
+  /** Front of the seat before the rearmost buttock. */
+  seatFrontMm: number;
+  table: TableOver | undefined;
+}
+
+/**
+ * Both legs: on the floor, hanging or on a rail, crossed where that is chosen. What is chosen and cannot be had here is
+ * said, and the legs are as without the choice.
+ */
+export function sittingLegs(
+  f: Figure,
+  { placement, shoe, footRail, seatFrontMm, table }: Before,
+  choice: PostureChoice['feet'],
+): { legs: Stance['legs']; heelGapMm: number; notes: PoseNote[] } {
+  const tiltRad = placement.tiltRad;
+  const notes: PoseNote[] = [];
+  const standing = legsFor(f, placement, shoe.shoeMm);
+  const knees = choice === 'knees-crossed' ? crossedKnees(f, standing, { tiltRad, shoe, table }) : undefined;
+  const crossed = knees && 'legs' in knees ? knees.legs : undefined;
+  if (knees) notes.push({ kind: 'why' in knees ? knees.why : 'knees-crossed' });
+  const usual = choice === undefined || (knees !== undefined && !crossed);
+  const wantsRail = choice === 'rail' || (usual && standing.heelGapMm > 0.5);
+  const railed = wantsRail && footRail ? legsOnRail(f, placement, shoe.shoeMm, footRail) : undefined;
+  if (railed) notes.push({ kind: 'feet-on-rail' });
+  else if (choice === 'rail') notes.push({ kind: 'rail-out-of-reach' });
+  const bends: Legs = railed ?? standing;
+  const ankles = choice === 'ankles-crossed';
+  if (ankles) notes.push({ kind: 'ankles-crossed' });
+  if (bends.heelGapMm > 0.5) notes.push({ kind: 'feet-hang', valueMm: bends.heelGapMm });
+  if (bends.kneesLift) notes.push({ kind: 'knees-lift' });
+  const uncrossed = ankles ? crossedAnkles(f, bends, tiltRad, seatFrontMm) : sideBySide(bends);
+  return { legs: crossed ?? uncrossed, heelGapMm: bends.heelGapMm, notes };
+}
