@@ -63,6 +63,22 @@ describe('how somebody sits', () => {
     await expect.poll(words).toBe(before);
   });
 
+  it('lays one knee over the other where the table leaves room for it', async () => {
+    const before = await words();
+    await chooseOf('Feet', /^One knee over the other the table leaves no room/);
+    await page
+      .getByText(/^Not chosen for .*the table leaves no room/)
+      .first()
+      .waitFor();
+    expect(await words()).toBe(before);
+    await page.locator('[data-piece="T1"]').click();
+    await page.locator('[data-scene]').press('Delete');
+    await chooseOf('Feet', /^One knee over the other$/);
+    await expect.poll(words).toMatch(/one knee over the other/);
+    for (let i = 0; i < 2; i++) await page.getByRole('button', { name: /^Undo/ }).click();
+    await expect.poll(words).toBe(before);
+  });
+
   it('comes with the room round each sitter, and fits a phone', async () => {
     const list = page.getByRole('heading', { name: 'Room round each sitter' }).locator('..');
     const gap = list.getByRole('button', { name: /between|overlap|touch/ }).first();

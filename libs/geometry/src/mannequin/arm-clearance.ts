@@ -48,8 +48,10 @@ const AIR_MM = 3;
 /**
  * How much an arm runs into trunk, back, thighs or the edge it lies on: the deepest place, in shares of 12 mm; 0 when
  * it is clear.
+ *
+ * @param enough - nothing deeper is looked for once this is reached
  */
-export function overlap(elbow: Vec3, wrist: Vec3, among: Obstacles): number {
+export function overlap(elbow: Vec3, wrist: Vec3, among: Obstacles, enough = Infinity): number {
   const { figure, levels, bend, shoulder, under } = among;
   const rest = typeof under === 'function' ? undefined : under;
   const { radius } = figure;
@@ -64,6 +66,7 @@ export function overlap(elbow: Vec3, wrist: Vec3, among: Obstacles): number {
     const r = mix(t === 0 ? radius.elbow : radius.forearm, radius.wrist, t);
     look(p, r);
     if (typeof under === 'function') most = Math.max(most, under(p[0], p[2]) + 0.9 * r - p[1]);
+    if (most >= enough * BAD_MM) break;
   }
   const across = rest?.axis ?? 2;
   if (rest && elbow[across] < rest.edgeMm && wrist[across] > rest.edgeMm) {

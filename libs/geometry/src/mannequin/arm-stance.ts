@@ -39,7 +39,7 @@ function bestReach(f: Figure, bend: TrunkBend, wishes: Wish[], under: Rest | Thi
       if (best && least >= best.cost) break;
       const reach = reachFor(shoulder, wrist, upperMm, forearmMm, POLE, step * SWIVEL_STEP_RAD);
       const flesh = elbowFlesh(f, { shoulder, elbow: reach.middle, wrist: reach.end });
-      const cost = least + overlap(flesh, reach.end, among);
+      const cost = least + overlap(flesh, reach.end, among, best && best.cost - least);
       if (!best || cost < best.cost) best = { reach, cost };
     }
   }

@@ -22,11 +22,11 @@ export function sayNote({ kind, valueMm = 0, side }: PoseNote, style: LengthStyl
     case 'knees-crossed':
       return 'one knee over the other';
     case 'too-full-to-cross':
-      return 'knees not crossed: too full about the thighs or the belly to lay one over the other';
+      return 'thighs or belly leave no room to lay one knee over the other';
     case 'too-low-to-cross':
-      return 'knees not crossed: the seat is too low, the thighs lift off it already';
+      return 'the seat is too low to lay one knee over the other';
     case 'table-over-knees':
-      return 'knees not crossed: the table leaves no room for a raised knee';
+      return 'the table leaves no room to lay one knee over the other';
     case 'rail-out-of-reach':
       return 'no rail in reach of the feet';
     case 'sits-upright':
