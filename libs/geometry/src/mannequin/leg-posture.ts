@@ -28,36 +28,80 @@ export interface Legs {
 const hipAxis: Vec3 = [0, HIP_HEIGHT_MM, HIP_FORWARD_MM];
 const shinOf = (f: Figure): number => restKnee(f)[1] - restAnkle(f)[1];
 
+/** Height of the knee joint above the floor. */
+const kneeHeight = (f: Figure, placement: BodyPlacement, thighRad: number): number =>
+  toRoom(placement, turnAboutX(restKnee(f), hipAxis, thighRad))[1];
+
+/** The thigh lifted until its knee is so high. */
+function thighLiftedTo(f: Figure, placement: BodyPlacement, kneeMm: number): number {
+  let low = 0;
+  let high = Math.PI / 3;
+  for (let i = 0; i < 24; i++) {
+    const middle = (low + high) / 2;
+    if (kneeHeight(f, placement, -middle) < kneeMm) low = middle;
+    else high = middle;
+  }
+  return -(low + high) / 2;
+}
+
+/** How far toes go down so that they reach what a sole is so far above. */
+const toesDown = (f: Figure, gapMm: number): number =>
+  Math.min(TOES_DOWN_RAD, Math.asin(clamp(gapMm / (0.72 * f.FL), 0, 1)));
+
 /** Thighs along the seat, feet on the floor if they reach it: shins forward when the seat is low, hanging when high. */
 export function legsFor(f: Figure, placement: BodyPlacement, shoeMm: number): Legs {
   const shinMm = shinOf(f);
   const footMm = f.MH + shoeMm;
-  const kneeHeight = (thighRad: number): number =>
-    toRoom(placement, turnAboutX(restKnee(f), hipAxis, thighRad))[1];
+  const kneeMm = kneeHeight(f, placement, 0);
   const upright = placement.tiltRad;
-  const cosine = (kneeHeight(0) - footMm) / shinMm;
+  const cosine = (kneeMm - footMm) / shinMm;
   if (cosine >= 1) {
-    const gap = kneeHeight(0) - footMm - shinMm;
-    const toes = Math.min(TOES_DOWN_RAD, Math.asin(clamp(gap / (0.72 * f.FL), 0, 1)));
-    return { thighRad: 0, shinRad: upright, footRad: upright + toes, heelGapMm: gap, kneesLift: false };
+    const gap = kneeMm - footMm - shinMm;
+    return {
+      thighRad: 0,
+      shinRad: upright,
+      footRad: upright + toesDown(f, gap),
+      heelGapMm: gap,
+      kneesLift: false,
+    };
   }
   const shin = Math.acos(clamp(cosine, -1, 1));
   if (shin <= SHIN_FURTHEST_RAD) {
     return { thighRad: 0, shinRad: upright - shin, footRad: upright, heelGapMm: 0, kneesLift: false };
   }
-  let low = 0;
-  let high = Math.PI / 3;
-  for (let i = 0; i < 24; i++) {
-    const middle = (low + high) / 2;
-    if (kneeHeight(-middle) < shinMm * Math.cos(SHIN_FURTHEST_RAD) + footMm) low = middle;
-    else high = middle;
-  }
   return {
-    thighRad: -(low + high) / 2,
+    thighRad: thighLiftedTo(f, placement, shinMm * Math.cos(SHIN_FURTHEST_RAD) + footMm),
     shinRad: upright - SHIN_FURTHEST_RAD,
     footRad: upright,
     heelGapMm: 0,
     kneesLift: true,
+  };
+}
+
+/**
+ * The same legs with the feet further back: shins lean back, thighs rise where the shins stand up from leaning forwards,
+ * heels where the shins go beyond upright.
+ *
+ * @param legs - from `legsFor`
+ * @param backMm - how far the ankles go back
+ */
+export function legsDrawnBack(
+  f: Figure,
+  placement: BodyPlacement,
+  shoeMm: number,
+  legs: Legs,
+  backMm: number,
+): Legs {
+  const upright = placement.tiltRad;
+  const shinMm = shinOf(f);
+  const swing = Math.asin(clamp(Math.sin(legs.shinRad - upright) + backMm / shinMm, -1, 1));
+  const standsMm = shinMm * Math.cos(swing) + f.MH + shoeMm;
+  const over = kneeHeight(f, placement, legs.thighRad) - standsMm;
+  return {
+    ...legs,
+    thighRad: over < 0 ? thighLiftedTo(f, placement, standsMm) : legs.thighRad,
+    shinRad: upright + swing,
+    footRad: upright + toesDown(f, over),
   };
 }
 

@@ -3,6 +3,7 @@ export interface PoseNote {
   kind:
     | 'feet-hang'
     | 'feet-on-rail'
+    | 'feet-drawn-back'
     | 'ankles-crossed'
     | 'knees-crossed'
     /** Thighs or belly leave a knee no room to lie over the other. */

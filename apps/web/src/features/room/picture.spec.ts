@@ -1,8 +1,11 @@
 import { createBodyModel, loadRuleBook, type FitCell, type MeasureKey } from '@settlewright/anthropometry';
 import {
   addPiece,
+  ARRANGEMENTS,
   choosePosture,
   emptySetDocument,
+  seatSitter,
+  sitterDistances,
   tapeLines,
   type SetDocument,
 } from '@settlewright/geometry';
@@ -114,6 +117,25 @@ describe('what follows from a document', () => {
     expect(Math.hypot(shift(0), shift(2))).toBeCloseTo(40, 6);
     expect(chosen.bodies[0]!.pose).not.toBe(usual.bodies[0]!.pose);
     expect(chosen.sheet.rows).toEqual(usual.sheet.rows);
+  });
+
+  it('keeps feet of those opposite apart, each made once for as long as nothing there changes', () => {
+    const maker = createPictureMaker(engine, []);
+    const sitter = { kind: 'mannequin', bodyData: 'men', measure: 'stature', percentile: 95 } as const;
+    const benches = ARRANGEMENTS.find(({ id }) => id === 'facing-benches')!.build();
+    const seated = benches.pieces
+      .filter(({ kind }) => kind === 'bench')
+      .reduce((document, { id }) => seatSitter(document, id, 1, sitter), benches);
+    const pair = seatSitter(seated, seated.seating[1]!.pieceId, 2, sitter);
+    const { bodies, parts } = maker.picture(pair);
+    const back = bodies.filter(({ pose }) => pose.notes.some(({ kind }) => kind === 'feet-drawn-back'));
+    expect(back).toHaveLength(2);
+    expect(back.every(({ at }) => at.feetBackMm! > 0)).toBe(true);
+    for (const { overlaps } of sitterDistances(bodies, parts)) {
+      expect(overlaps.filter(({ segment }) => segment.includes('foot'))).toEqual([]);
+    }
+    const noted = { ...pair, pieces: pair.pieces.map((piece) => ({ ...piece, note: 'new' })) };
+    maker.picture(noted).bodies.forEach(({ pose }, i) => expect(pose).toBe(bodies[i]!.pose));
   });
 
   it('is made once for a document, so that nothing is computed again while it is looked at', () => {

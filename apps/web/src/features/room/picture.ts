@@ -10,6 +10,7 @@ import {
 } from '@settlewright/anthropometry';
 import {
   deriveParts,
+  feetBack,
   footRailOf,
   measureSet,
   placeFrames,
@@ -94,19 +95,22 @@ function createBodyMaker() {
     body: BodyInput,
     parts: readonly Part[],
     choice: PostureChoice | undefined,
+    feetBackMm = 0,
   ) => {
     // A slipped digit in one measure may put another below nothing: that person is named, the others are drawn.
     if (Object.values(body.means).some((value) => !(value > 0))) return undefined;
     const sinkMm = situation.foam ? seatSinkMm(situation.foam, body.weightKg).sinkMm : 0;
     const { means, shoeMm } = body;
     const around = { ...situation, footRail: footRailOf(parts, frame) };
-    const at: PosedAt = { shoeMm, frame, situation: around, sinkMm, choice };
+    const at: PosedAt = { shoeMm, frame, situation: around, sinkMm, choice, feetBackMm };
     const input = { means, ...at };
     const key = JSON.stringify(input);
-    const last = kept.get(frame.placeId);
+    // Both stay known: how far feet go back is asked of those that have not gone yet.
+    const spot = `${frame.placeId} ${feetBackMm > 0}`;
+    const last = kept.get(spot);
     if (last?.key === key) return last;
     const made = { key, pose: poseMannequin(input), at };
-    kept.set(frame.placeId, made);
+    kept.set(spot, made);
     return made;
   };
 }
@@ -189,30 +193,35 @@ export function createPictureMaker(
       document.pieces.flatMap((piece) => placeFrames(piece, document)).map((frame) => [frame.placeId, frame]),
     );
     const colourAt = coloursOf(document, cast);
-    return document.seating.flatMap(({ pieceId, place, sitter, posture }): SeatedBody[] => {
+    const sitting = document.seating.flatMap(({ pieceId, place, sitter, posture }) => {
       const placeId = `${pieceId}:${place}`;
       const frame = frames.get(placeId);
       const body = bodies.get(placeId);
       const measured = situation.places.find((candidate) => candidate.placeId === placeId);
       if (!frame || !body || !measured) return [];
-      const made = makeBody(frame, measured, body, parts, posture);
-      if (!made) return [];
-      const { pose, at } = made;
-      return [
-        {
-          placeId,
-          pieceId,
-          name: sitterName(sitter, cast),
-          colour: colourAt(placeId),
-          statureMm: body.means.stature,
-          estimated: body.estimated,
-          pose,
-          at,
-          ...(body.belief && { belief: body.belief }),
-          forScale: sitter.kind === 'child',
-          crownMm: crownOf(pose, frame),
-        },
-      ];
+      const sit = (feetBackMm?: number) => makeBody(frame, measured, body, parts, posture, feetBackMm);
+      const alone = sit();
+      return alone ? [{ placeId, pieceId, sitter, frame, body, sit, alone }] : [];
+    });
+    const backs = feetBack(
+      sitting.map(({ alone }) => alone.pose),
+      parts,
+    );
+    return sitting.map(({ placeId, pieceId, sitter, frame, body, sit, alone }, i): SeatedBody => {
+      const { pose, at } = (backs[i] && sit(backs[i])) || alone;
+      return {
+        placeId,
+        pieceId,
+        name: sitterName(sitter, cast),
+        colour: colourAt(placeId),
+        statureMm: body.means.stature,
+        estimated: body.estimated,
+        pose,
+        at,
+        ...(body.belief && { belief: body.belief }),
+        forScale: sitter.kind === 'child',
+        crownMm: crownOf(pose, frame),
+      };
     });
   }
 

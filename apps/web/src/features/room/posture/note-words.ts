@@ -17,6 +17,8 @@ export function sayNote({ kind, valueMm = 0, side }: PoseNote, style: LengthStyl
       return sided('hand on the lap', 'hands on the lap');
     case 'feet-on-rail':
       return 'feet on the rail';
+    case 'feet-drawn-back':
+      return `feet drawn back ${size} from what is before them`;
     case 'ankles-crossed':
       return 'ankles crossed';
     case 'knees-crossed':

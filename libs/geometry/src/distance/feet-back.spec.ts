@@ -1,0 +1,121 @@
+import { describe, expect, it } from 'vitest';
+import { personAt } from '../../test/seated-room.ts';
+import { poseMannequin, type MannequinPose } from '../mannequin/pose.ts';
+import type { Part } from '../parts/part.ts';
+import { feetBack } from './feet-back.ts';
+import { gapBetween } from './gap.ts';
+import { segmentShape } from './solids.ts';
+
+const man = personAt('men', 95);
+const woman = personAt('women', 50);
+
+/** Somebody on a stool whose crook of the knee is as high as the seat; facing 0 looks along +z. */
+const sit = (
+  means: typeof man,
+  zMm: number,
+  facingRad: number,
+  over: Partial<Parameters<typeof poseMannequin>[0]> = {},
+): MannequinPose =>
+  poseMannequin({
+    means,
+    shoeMm: 25,
+    frame: { hipMm: [0, means.popliteal_height + 10, zMm], facingRad },
+    situation: { effectiveDepthMm: 380, seatTiltRad: 0, backLeanRad: 0.1, backTopMm: 1000 },
+    sinkMm: 0,
+    ...over,
+  });
+
+const feetOf = ({ segments }: MannequinPose) =>
+  segments.filter(({ tag }) => tag === 'shoe').map((segment) => segmentShape(segment));
+const gapOfFeet = (one: MannequinPose, other: MannequinPose): number =>
+  Math.min(...feetOf(one).flatMap((a) => feetOf(other).map((b) => gapBetween(a, b)!.distanceMm)));
+const toe = (pose: MannequinPose): number => Math.max(...feetOf(pose).map(({ maxMm }) => maxMm[2]));
+
+const post = (zMm: number, xMm = 0): Part => ({
+  id: 'post',
+  pieceId: 't1',
+  role: 'column',
+  material: 'oak',
+  solid: { shape: 'box', sizeMm: [400, 700, 60] },
+  positionMm: [xMm, 350, zMm],
+  rotationRad: [0, 0, 0],
+});
+
+describe('feet keep clear of what is before them', () => {
+  const apart = (zMm: number): [MannequinPose, MannequinPose] => [sit(man, 0, 0), sit(woman, zMm, Math.PI)];
+  /** Where hips of both stand so that their toes are so far into each other. */
+  const distance = (overlapMm: number): number => {
+    const [one, other] = apart(0);
+    return toe(one) - Math.min(...feetOf(other).map(({ minMm }) => minMm[2])) - overlapMm;
+  };
+
+  it('draws back those opposite each other alike, until there is room between them', () => {
+    const zMm = distance(60);
+    const [one, other] = apart(zMm);
+    expect(gapOfFeet(one, other)).toBeLessThan(-30);
+    const backs = feetBack([one, other], []);
+    expect(backs[0]).toBe(backs[1]);
+    expect(backs[0]).toBeGreaterThanOrEqual(30);
+    expect(backs[0]).toBeLessThanOrEqual(45);
+    const drawn = [
+      sit(man, 0, 0, { feetBackMm: backs[0]! }),
+      sit(woman, zMm, Math.PI, { feetBackMm: backs[1]! }),
+    ] as const;
+    expect(gapOfFeet(...drawn)).toBeGreaterThan(5);
+    expect(Math.abs(toe(one) - toe(drawn[0]) - backs[0]!)).toBeLessThan(1);
+    expect(drawn[0].notes).toContainEqual({ kind: 'feet-drawn-back', valueMm: backs[0] });
+    expect(feetBack([other, one], [])).toEqual(backs);
+  });
+
+  it('leaves feet that are clear, and those that look the same way', () => {
+    expect(feetBack(apart(distance(-30)), [])).toEqual([0, 0]);
+    const rows = [sit(man, 0, 0), sit(man, 2000, 0)];
+    expect(feetBack(rows, [])).toEqual([0, 0]);
+  });
+
+  it('moves one alone where the other has crossed ankles or feet on a rail', () => {
+    const zMm = distance(40);
+    const crossed = sit(man, 0, 0, { choice: { feet: 'ankles-crossed' } });
+    const [back, ahead] = feetBack([crossed, sit(woman, zMm, Math.PI)], []);
+    expect(back).toBe(0);
+    expect(ahead).toBeGreaterThan(30);
+  });
+
+  it('goes back from a post, as far as another behind the heels lets it', () => {
+    const one = sit(man, 0, 0);
+    const before = post(toe(one) + 10);
+    const [back] = feetBack([one], [before]);
+    expect(back).toBeGreaterThanOrEqual(30);
+    expect(back).toBeLessThanOrEqual(40);
+    const heel = Math.min(...feetOf(one).map(({ minMm }) => minMm[2]));
+    expect(feetBack([one], [before, { ...post(heel - 45), id: 'riser' }])).toEqual([0]);
+  });
+
+  it('stays where going back frees nothing: a wall beside, a post further in than shins go', () => {
+    const one = sit(man, 0, 0);
+    const wall: Part = {
+      ...post(0),
+      solid: { shape: 'box', sizeMm: [20, 2000, 4000] },
+      positionMm: [Math.max(...feetOf(one).map(({ maxMm }) => maxMm[0])), 1000, 0],
+    };
+    expect(feetBack([one], [wall])).toEqual([0]);
+    expect(feetBack([one], [post(toe(one) - 250)])).toEqual([0]);
+  });
+
+  it('keeps soles on the floor and thighs near the seat while feet go back, on low and high seats', () => {
+    for (const seatMm of [man.popliteal_height - 60, man.popliteal_height, man.popliteal_height + 24]) {
+      const frame = { hipMm: [0, seatMm, 135] as const, facingRad: 0 };
+      const usual = sit(man, 0, 0, { frame });
+      for (const feetBackMm of [20, 60, 100]) {
+        const drawn = sit(man, 0, 0, { frame, feetBackMm });
+        const went = usual.joints.leftAnkle[2] - drawn.joints.leftAnkle[2];
+        expect(Math.abs(went - feetBackMm)).toBeLessThan(2);
+        expect(Math.abs(Math.min(...feetOf(drawn).map(({ minMm }) => minMm[1])))).toBeLessThan(6);
+        // A shin that stands up from leaning forwards lifts the knee.
+        const rise = drawn.joints.leftKnee[1] - usual.joints.leftKnee[1];
+        expect(rise).toBeGreaterThan(-0.1);
+        expect(rise).toBeLessThan(45);
+      }
+    }
+  });
+});
