@@ -69,7 +69,7 @@ export * from './distance/joint-envelopes.ts';
 export { gapBetween, type Gap } from './distance/gap.ts';
 export { partShape, segmentShape } from './distance/solids.ts';
 export type { Shape } from './distance/shape.ts';
-export { feetBack } from './distance/feet-back.ts';
+export { feetClear } from './distance/feet-clear.ts';
 export { SEAT_ROLES, sitterDistances } from './distance/sitter-distances.ts';
 export * from './distance/sitter-gap.ts';
 export * from './drawing/drawing.ts';

@@ -25,6 +25,13 @@ export interface Legs {
   kneesLift: boolean;
 }
 
+/** How far feet have gone from where they would stand or hang, to keep clear of something. */
+export interface FeetMoved {
+  backMm: number;
+  /** To the sitter's left; below 0 to the right. */
+  leftMm: number;
+}
+
 const hipAxis: Vec3 = [0, HIP_HEIGHT_MM, HIP_FORWARD_MM];
 const shinOf = (f: Figure): number => restKnee(f)[1] - restAnkle(f)[1];
 
@@ -79,29 +86,32 @@ export function legsFor(f: Figure, placement: BodyPlacement, shoeMm: number): Le
 }
 
 /**
- * The same legs with the feet further back: shins lean back, thighs rise where the shins stand up from leaning forwards,
- * heels where the shins go beyond upright.
+ * The same legs with the feet further back or aside: shins lean, thighs rise where the shins stand up from leaning
+ * forwards, heels where the shins go beyond upright.
  *
  * @param legs - from `legsFor`
- * @param backMm - how far the ankles go back
+ * @returns the legs, and how far their shins lean to the sitter's left, radians
  */
-export function legsDrawnBack(
+export function legsMoved(
   f: Figure,
   placement: BodyPlacement,
   shoeMm: number,
   legs: Legs,
-  backMm: number,
-): Legs {
+  { backMm, leftMm }: FeetMoved,
+): Legs & { leftRad: number } {
   const upright = placement.tiltRad;
   const shinMm = shinOf(f);
-  const swing = Math.asin(clamp(Math.sin(legs.shinRad - upright) + backMm / shinMm, -1, 1));
-  const standsMm = shinMm * Math.cos(swing) + f.MH + shoeMm;
+  const leftRad = Math.asin(clamp(leftMm / shinMm, -1, 1));
+  const leaningMm = shinMm * Math.cos(leftRad);
+  const swing = Math.asin(clamp((shinMm * Math.sin(legs.shinRad - upright) + backMm) / leaningMm, -1, 1));
+  const standsMm = leaningMm * Math.cos(swing) + f.MH + shoeMm;
   const over = kneeHeight(f, placement, legs.thighRad) - standsMm;
   return {
     ...legs,
     thighRad: over < 0 ? thighLiftedTo(f, placement, standsMm) : legs.thighRad,
     shinRad: upright + swing,
     footRad: upright + toesDown(f, over),
+    leftRad,
   };
 }
 

@@ -4,6 +4,7 @@ export interface PoseNote {
     | 'feet-hang'
     | 'feet-on-rail'
     | 'feet-drawn-back'
+    | 'feet-aside'
     | 'ankles-crossed'
     | 'knees-crossed'
     /** Thighs or belly leave a knee no room to lie over the other. */
@@ -25,6 +26,6 @@ export interface PoseNote {
     /** Something was chosen; the checks answer for the posture without it. */
     | 'not-as-checked';
   valueMm?: number;
-  /** Of one arm or leg alone; left out where it is true of both. */
+  /** Of one arm or leg alone; left out where it is true of both. Of feet that go aside, where to. */
   side?: 'left' | 'right';
 }

@@ -7,7 +7,7 @@ import type { FigureMeans } from './figure.ts';
 import { readFigure } from './figure.ts';
 import { bodyJoints, type MannequinJoints } from './joints.ts';
 import { bodySegments, type MannequinSegment } from './segments.ts';
-import type { FootRail } from './leg-posture.ts';
+import type { FeetMoved, FootRail } from './leg-posture.ts';
 import { sittingLegs } from './sitting-legs.ts';
 import { HIP_FORWARD_MM, type Stance } from './stance.ts';
 import type { PoseNote } from './pose-note.ts';
@@ -74,8 +74,7 @@ const FLAT_SOLE_MM = 25;
  * @param input.forefootMm - sole under the ball of the foot, mm; the heel's height when that is less, 25 otherwise
  * @param input.slumpMm - how much lower the eye is than upright, mm; 0 when absent. The pelvis moves forward, belt and
  * chest bend against each other
- * @param input.feetBackMm - how far feet are drawn back to keep clear of others, from `feetBack`; those on a rail or
- * crossed are not
+ * @param input.feet - how far feet keep away from others, from `feetClear`; those on a rail or crossed do not
  * @param input.choice - what somebody chose of the posture; absent parts are as above
  * @returns the pose; throws a RangeError naming the measure when one is missing
  * @source hip centre 92 mm over the seat and 135 mm before the buttock: SAE J826 device figures and
@@ -90,7 +89,7 @@ export function poseMannequin(input: {
   sinkMm: number;
   forefootMm?: number;
   slumpMm?: number;
-  feetBackMm?: number;
+  feet?: FeetMoved;
   choice?: PostureChoice | undefined;
 }): MannequinPose {
   const { means, shoeMm, situation, sinkMm, choice = {} } = input;
@@ -125,7 +124,7 @@ export function poseMannequin(input: {
       footRail: footRail && { ...footRail, aheadOfHipMm: footRail.aheadOfHipMm - aheadMm - forward },
       seatFrontMm: situation.effectiveDepthMm - forward,
       table: under && { undersideMm: under[1], edgeMm: under[2] },
-      feetBackMm: input.feetBackMm ?? 0,
+      feet: input.feet ?? { backMm: 0, leftMm: 0 },
     },
     choice.feet,
   );

@@ -3,7 +3,7 @@ import type { BodyPlacement } from './body-placement.ts';
 import { crossedAnkles, sideBySide } from './crossed-legs.ts';
 import type { Figure } from './figure.ts';
 import { crossedKnees, type TableOver } from './knee-over-knee.ts';
-import { legsDrawnBack, legsFor, legsOnRail, type FootRail, type Legs } from './leg-posture.ts';
+import { legsFor, legsMoved, legsOnRail, type FeetMoved, type FootRail, type Legs } from './leg-posture.ts';
 import type { PoseNote } from './pose-note.ts';
 import type { Stance } from './stance.ts';
 
@@ -15,8 +15,8 @@ interface Before {
   /** Front of the seat before the rearmost buttock. */
   seatFrontMm: number;
   table: TableOver | undefined;
-  /** How far feet that stand or hang are drawn back. */
-  feetBackMm: number;
+  /** How far feet that stand or hang keep away from what is before them. */
+  feet: FeetMoved;
 }
 
 /**
@@ -25,7 +25,7 @@ interface Before {
  */
 export function sittingLegs(
   f: Figure,
-  { placement, shoe, footRail, seatFrontMm, table, feetBackMm }: Before,
+  { placement, shoe, footRail, seatFrontMm, table, feet }: Before,
   choice: PostureChoice['feet'],
 ): { legs: Stance['legs']; heelGapMm: number; notes: PoseNote[] } {
   const tiltRad = placement.tiltRad;
@@ -41,13 +41,24 @@ export function sittingLegs(
   else if (choice === 'rail') notes.push({ kind: 'rail-out-of-reach' });
   const bends: Legs = railed ?? standing;
   const ankles = choice === 'ankles-crossed';
-  const drawnBack = feetBackMm > 0 && !railed && !ankles && !crossed;
-  if (drawnBack) notes.push({ kind: 'feet-drawn-back', valueMm: feetBackMm });
+  const moves = !railed && !ankles && !crossed && (feet.backMm > 0 || feet.leftMm !== 0);
+  if (moves && feet.backMm > 0) notes.push({ kind: 'feet-drawn-back', valueMm: feet.backMm });
+  if (moves && feet.leftMm !== 0) {
+    const side = feet.leftMm > 0 ? 'left' : 'right';
+    notes.push({ kind: 'feet-aside', valueMm: Math.abs(feet.leftMm), side });
+  }
   if (ankles) notes.push({ kind: 'ankles-crossed' });
   if (bends.heelGapMm > 0.5) notes.push({ kind: 'feet-hang', valueMm: bends.heelGapMm });
   if (bends.kneesLift) notes.push({ kind: 'knees-lift' });
-  const uncrossed = ankles
-    ? crossedAnkles(f, bends, tiltRad, seatFrontMm)
-    : sideBySide(drawnBack ? legsDrawnBack(f, placement, shoe.shoeMm, bends, feetBackMm) : bends);
-  return { legs: crossed ?? uncrossed, heelGapMm: bends.heelGapMm, notes };
+  const uncrossed = (): Stance['legs'] => {
+    if (ankles) return crossedAnkles(f, bends, tiltRad, seatFrontMm);
+    if (!moves) return sideBySide(bends);
+    const { leftRad, ...moved } = legsMoved(f, placement, shoe.shoeMm, bends, feet);
+    const [left, right] = sideBySide(moved);
+    return [
+      { ...left, inwardRad: -leftRad },
+      { ...right, inwardRad: leftRad },
+    ];
+  };
+  return { legs: crossed ?? uncrossed(), heelGapMm: bends.heelGapMm, notes };
 }

@@ -121,16 +121,17 @@ describe('what follows from a document', () => {
 
   it('keeps feet of those opposite apart, each made once for as long as nothing there changes', () => {
     const maker = createPictureMaker(engine, []);
-    const sitter = { kind: 'mannequin', bodyData: 'men', measure: 'stature', percentile: 95 } as const;
+    const man = { kind: 'mannequin', bodyData: 'men', measure: 'stature', percentile: 95 } as const;
+    const woman = { ...man, bodyData: 'women', percentile: 50 } as const;
     const benches = ARRANGEMENTS.find(({ id }) => id === 'facing-benches')!.build();
     const seated = benches.pieces
       .filter(({ kind }) => kind === 'bench')
-      .reduce((document, { id }) => seatSitter(document, id, 1, sitter), benches);
-    const pair = seatSitter(seated, seated.seating[1]!.pieceId, 2, sitter);
+      .reduce((document, { id }) => seatSitter(document, id, 1, man), benches);
+    const pair = seatSitter(seated, seated.seating[1]!.pieceId, 2, woman);
     const { bodies, parts } = maker.picture(pair);
     const back = bodies.filter(({ pose }) => pose.notes.some(({ kind }) => kind === 'feet-drawn-back'));
     expect(back).toHaveLength(2);
-    expect(back.every(({ at }) => at.feetBackMm! > 0)).toBe(true);
+    expect(back.every(({ at }) => at.feet!.backMm > 0)).toBe(true);
     for (const { overlaps } of sitterDistances(bodies, parts)) {
       expect(overlaps.filter(({ segment }) => segment.includes('foot'))).toEqual([]);
     }

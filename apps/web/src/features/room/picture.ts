@@ -10,7 +10,7 @@ import {
 } from '@settlewright/anthropometry';
 import {
   deriveParts,
-  feetBack,
+  feetClear,
   footRailOf,
   measureSet,
   placeFrames,
@@ -95,18 +95,18 @@ function createBodyMaker() {
     body: BodyInput,
     parts: readonly Part[],
     choice: PostureChoice | undefined,
-    feetBackMm = 0,
+    feet?: PosedAt['feet'],
   ) => {
     // A slipped digit in one measure may put another below nothing: that person is named, the others are drawn.
     if (Object.values(body.means).some((value) => !(value > 0))) return undefined;
     const sinkMm = situation.foam ? seatSinkMm(situation.foam, body.weightKg).sinkMm : 0;
     const { means, shoeMm } = body;
     const around = { ...situation, footRail: footRailOf(parts, frame) };
-    const at: PosedAt = { shoeMm, frame, situation: around, sinkMm, choice, feetBackMm };
+    const at: PosedAt = { shoeMm, frame, situation: around, sinkMm, choice, ...(feet && { feet }) };
     const input = { means, ...at };
     const key = JSON.stringify(input);
-    // Both stay known: how far feet go back is asked of those that have not gone yet.
-    const spot = `${frame.placeId} ${feetBackMm > 0}`;
+    // Both stay known: how far feet go is asked of those that have not gone yet.
+    const spot = `${frame.placeId} ${feet !== undefined}`;
     const last = kept.get(spot);
     if (last?.key === key) return last;
     const made = { key, pose: poseMannequin(input), at };
@@ -199,16 +199,17 @@ export function createPictureMaker(
       const body = bodies.get(placeId);
       const measured = situation.places.find((candidate) => candidate.placeId === placeId);
       if (!frame || !body || !measured) return [];
-      const sit = (feetBackMm?: number) => makeBody(frame, measured, body, parts, posture, feetBackMm);
+      const sit = (feet?: PosedAt['feet']) => makeBody(frame, measured, body, parts, posture, feet);
       const alone = sit();
       return alone ? [{ placeId, pieceId, sitter, frame, body, sit, alone }] : [];
     });
-    const backs = feetBack(
+    const feet = feetClear(
       sitting.map(({ alone }) => alone.pose),
       parts,
     );
     return sitting.map(({ placeId, pieceId, sitter, frame, body, sit, alone }, i): SeatedBody => {
-      const { pose, at } = (backs[i] && sit(backs[i])) || alone;
+      const moves = feet[i] && (feet[i].backMm > 0 || feet[i].leftMm !== 0);
+      const { pose, at } = (moves && sit(feet[i])) || alone;
       return {
         placeId,
         pieceId,

@@ -19,6 +19,8 @@ export function sayNote({ kind, valueMm = 0, side }: PoseNote, style: LengthStyl
       return 'feet on the rail';
     case 'feet-drawn-back':
       return `feet drawn back ${size} from what is before them`;
+    case 'feet-aside':
+      return `feet ${size} to the sitter’s ${side}, past those opposite`;
     case 'ankles-crossed':
       return 'ankles crossed';
     case 'knees-crossed':

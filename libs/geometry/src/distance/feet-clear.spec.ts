@@ -1,11 +1,15 @@
 import { describe, expect, it } from 'vitest';
+import jointFile from '@settlewright/seed-data/joint-ranges.json' with { type: 'json' };
 import { personAt } from '../../test/seated-room.ts';
+import { jointWarnings } from '../mannequin/joint-angles.ts';
+import { readJointRanges } from '../mannequin/joint-ranges.ts';
 import { poseMannequin, type MannequinPose } from '../mannequin/pose.ts';
 import type { Part } from '../parts/part.ts';
-import { feetBack } from './feet-back.ts';
+import { feetClear } from './feet-clear.ts';
 import { gapBetween } from './gap.ts';
 import { segmentShape } from './solids.ts';
 
+const STILL = { backMm: 0, leftMm: 0 };
 const man = personAt('men', 95);
 const woman = personAt('women', 50);
 
@@ -53,42 +57,58 @@ describe('feet keep clear of what is before them', () => {
     const zMm = distance(60);
     const [one, other] = apart(zMm);
     expect(gapOfFeet(one, other)).toBeLessThan(-30);
-    const backs = feetBack([one, other], []);
-    expect(backs[0]).toBe(backs[1]);
-    expect(backs[0]).toBeGreaterThanOrEqual(30);
-    expect(backs[0]).toBeLessThanOrEqual(45);
-    const drawn = [
-      sit(man, 0, 0, { feetBackMm: backs[0]! }),
-      sit(woman, zMm, Math.PI, { feetBackMm: backs[1]! }),
-    ] as const;
+    const feet = feetClear([one, other], []);
+    expect(feet[0]).toEqual(feet[1]);
+    const { backMm, leftMm } = feet[0]!;
+    expect(backMm).toBeGreaterThanOrEqual(30);
+    expect(backMm).toBeLessThanOrEqual(45);
+    expect(leftMm).toBe(0);
+    const drawn = [sit(man, 0, 0, { feet: feet[0]! }), sit(woman, zMm, Math.PI, { feet: feet[1]! })] as const;
     expect(gapOfFeet(...drawn)).toBeGreaterThan(5);
-    expect(Math.abs(toe(one) - toe(drawn[0]) - backs[0]!)).toBeLessThan(1);
-    expect(drawn[0].notes).toContainEqual({ kind: 'feet-drawn-back', valueMm: backs[0] });
-    expect(feetBack([other, one], [])).toEqual(backs);
+    expect(Math.abs(toe(one) - toe(drawn[0]) - backMm)).toBeLessThan(1);
+    expect(drawn[0].notes).toContainEqual({ kind: 'feet-drawn-back', valueMm: backMm });
+    expect(feetClear([other, one], [])).toEqual(feet);
+  });
+
+  it('goes past each other, each to their own left, where shins go no further back', () => {
+    const zMm = distance(330);
+    const [one, other] = apart(zMm);
+    const feet = feetClear([one, other], []);
+    expect(feet[0]!.leftMm).toBe(feet[1]!.leftMm);
+    const { leftMm } = feet[0]!;
+    expect(leftMm).toBeGreaterThan(0);
+    const drawn = [sit(man, 0, 0, { feet: feet[0]! }), sit(woman, zMm, Math.PI, { feet: feet[1]! })] as const;
+    expect(gapOfFeet(...drawn)).toBeGreaterThan(5);
+    expect(drawn[0].joints.leftAnkle[0] - one.joints.leftAnkle[0]).toBeCloseTo(leftMm, 0);
+    expect(other.joints.leftAnkle[0] - drawn[1].joints.leftAnkle[0]).toBeCloseTo(leftMm, 0);
+    expect(drawn[0].notes.map(({ kind }) => kind)).toEqual(
+      expect.arrayContaining(['feet-drawn-back', 'feet-aside']),
+    );
+    expect(jointWarnings(drawn[0], readJointRanges(jointFile))).toEqual([]);
   });
 
   it('leaves feet that are clear, and those that look the same way', () => {
-    expect(feetBack(apart(distance(-30)), [])).toEqual([0, 0]);
+    expect(feetClear(apart(distance(-30)), [])).toEqual([STILL, STILL]);
     const rows = [sit(man, 0, 0), sit(man, 2000, 0)];
-    expect(feetBack(rows, [])).toEqual([0, 0]);
+    expect(feetClear(rows, [])).toEqual([STILL, STILL]);
   });
 
   it('moves one alone where the other has crossed ankles or feet on a rail', () => {
     const zMm = distance(40);
     const crossed = sit(man, 0, 0, { choice: { feet: 'ankles-crossed' } });
-    const [back, ahead] = feetBack([crossed, sit(woman, zMm, Math.PI)], []);
-    expect(back).toBe(0);
-    expect(ahead).toBeGreaterThan(30);
+    const [stays, goes] = feetClear([crossed, sit(woman, zMm, Math.PI)], []);
+    expect(stays).toEqual(STILL);
+    expect(goes!.backMm).toBeGreaterThan(30);
   });
 
   it('goes back from a post, as far as another behind the heels lets it', () => {
     const one = sit(man, 0, 0);
     const before = post(toe(one) + 10);
-    const [back] = feetBack([one], [before]);
-    expect(back).toBeGreaterThanOrEqual(30);
-    expect(back).toBeLessThanOrEqual(40);
+    const [{ backMm } = STILL] = feetClear([one], [before]);
+    expect(backMm).toBeGreaterThanOrEqual(30);
+    expect(backMm).toBeLessThanOrEqual(40);
     const heel = Math.min(...feetOf(one).map(({ minMm }) => minMm[2]));
-    expect(feetBack([one], [before, { ...post(heel - 45), id: 'riser' }])).toEqual([0]);
+    expect(feetClear([one], [before, { ...post(heel - 45), id: 'riser' }])).toEqual([STILL]);
   });
 
   it('stays where going back frees nothing: a wall beside, a post further in than shins go', () => {
@@ -98,18 +118,18 @@ describe('feet keep clear of what is before them', () => {
       solid: { shape: 'box', sizeMm: [20, 2000, 4000] },
       positionMm: [Math.max(...feetOf(one).map(({ maxMm }) => maxMm[0])), 1000, 0],
     };
-    expect(feetBack([one], [wall])).toEqual([0]);
-    expect(feetBack([one], [post(toe(one) - 250)])).toEqual([0]);
+    expect(feetClear([one], [wall])).toEqual([STILL]);
+    expect(feetClear([one], [post(toe(one) - 250)])).toEqual([STILL]);
   });
 
   it('keeps soles on the floor and thighs near the seat while feet go back, on low and high seats', () => {
     for (const seatMm of [man.popliteal_height - 60, man.popliteal_height, man.popliteal_height + 24]) {
       const frame = { hipMm: [0, seatMm, 135] as const, facingRad: 0 };
       const usual = sit(man, 0, 0, { frame });
-      for (const feetBackMm of [20, 60, 100]) {
-        const drawn = sit(man, 0, 0, { frame, feetBackMm });
+      for (const backMm of [20, 60, 100]) {
+        const drawn = sit(man, 0, 0, { frame, feet: { backMm, leftMm: 0 } });
         const went = usual.joints.leftAnkle[2] - drawn.joints.leftAnkle[2];
-        expect(Math.abs(went - feetBackMm)).toBeLessThan(2);
+        expect(Math.abs(went - backMm)).toBeLessThan(2);
         expect(Math.abs(Math.min(...feetOf(drawn).map(({ minMm }) => minMm[1])))).toBeLessThan(6);
         // A shin that stands up from leaning forwards lifts the knee.
         const rise = drawn.joints.leftKnee[1] - usual.joints.leftKnee[1];
