@@ -63,9 +63,9 @@ describe('how somebody sits', () => {
     await expect.poll(words).toBe(before);
   });
 
-  it('lays one knee over the other where the table leaves room for it', async () => {
+  it('crosses knees where the table leaves room for it', async () => {
     const before = await words();
-    await chooseOf('Feet', /^One knee over the other the table leaves no room/);
+    await chooseOf('Feet', /^Knees crossed the table leaves no room/);
     await page
       .getByText(/^Not chosen for .*the table leaves no room/)
       .first()
@@ -73,8 +73,8 @@ describe('how somebody sits', () => {
     expect(await words()).toBe(before);
     await page.locator('[data-piece="T1"]').click();
     await page.locator('[data-scene]').press('Delete');
-    await chooseOf('Feet', /^One knee over the other$/);
-    await expect.poll(words).toMatch(/one knee over the other/);
+    await chooseOf('Feet', /^Knees crossed$/);
+    await expect.poll(words).toMatch(/knees crossed/);
     for (let i = 0; i < 2; i++) await page.getByRole('button', { name: /^Undo/ }).click();
     await expect.poll(words).toBe(before);
   });

@@ -138,7 +138,7 @@ function meetings(body: Body, other: Other): SitterGap[] {
 }
 
 /** Solids reach at most so far beyond the skin. */
-const SOLIDS_OFF_MM = 20;
+const SOLIDS_OFF_MM = 25;
 
 function meetingsOf(
   body: Body,

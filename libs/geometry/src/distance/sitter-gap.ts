@@ -23,7 +23,10 @@ export interface SitterGap extends Gap {
   /** The place of the body, such as `left forearm`. */
   segment: string;
   thing: Thing;
-  /** Skin is right within 3 mm; solids, where a body has no mesh, within 10 at elbows and shoulders of raised arms. */
+  /**
+   * Skin is right within 3 mm; solids, where a body has no mesh, within 10 at elbows and shoulders of raised arms, 25 at
+   * crossed legs and the arms over them.
+   */
   measuredOn: 'skin' | 'solids';
 }
 

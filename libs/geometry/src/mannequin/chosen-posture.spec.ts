@@ -1,6 +1,6 @@
 import { describe, expect, it } from 'vitest';
 import jointFile from '@settlewright/seed-data/joint-ranges.json' with { type: 'json' };
-import { percentilePeople } from '../../test/survey-like-people.ts';
+import { builds, percentilePeople } from '../../test/survey-like-people.ts';
 import { jointAngles, jointWarnings } from './joint-angles.ts';
 import { readFigure } from './figure.ts';
 import { readJointRanges } from './joint-ranges.ts';
@@ -155,11 +155,12 @@ describe('a posture that somebody chose', () => {
     }
   });
 
-  it('has hands on the thigh that is up', () => {
-    const flat = sit({ arms: 'lap' });
-    const crossed = sit({ arms: 'lap', feet: 'knees-crossed' });
-    expect(crossed.joints.leftWrist[1]).toBeGreaterThan(flat.joints.leftWrist[1]);
-    expect(crossed.joints.rightWrist[1]).toBeGreaterThan(crossed.joints.leftKnee[1] + kneeRadius(figure));
+  it('has one hand on the knee that is up, and the other along that thigh', () => {
+    const { joints } = sit({ arms: 'lap', feet: 'knees-crossed' });
+    expect(joints.rightWrist[1]).toBeGreaterThan(joints.leftKnee[1] + kneeRadius(figure));
+    const thigh = (joints.leftHip[1] + joints.leftKnee[1]) / 2;
+    expect(Math.abs(joints.leftWrist[1] - thigh)).toBeLessThan(90);
+    expect(joints.leftWrist[0]).toBeGreaterThan(joints.leftKnee[0] + 60);
     expect(sit({ feet: 'knees-crossed' }).joints.leftWrist).toEqual(sit(undefined).joints.leftWrist);
   });
 
@@ -176,20 +177,57 @@ describe('a posture that somebody chose', () => {
   it('says why knees do not cross, and leaves the legs as they were', () => {
     const stays = (pose: MannequinPose, usual: MannequinPose) =>
       expect(pose.stance.legs).toEqual(usual.stance.legs);
-    const low = sit({ feet: 'knees-crossed' }, {}, -150);
-    expect(kinds(low)).toEqual(expect.arrayContaining(['too-low-to-cross', 'knees-lift']));
-    stays(low, sit(undefined, {}, -150));
     const stout = { ...woman, abdominal_extension_depth_sitting: 340 };
     const full = sit({ feet: 'knees-crossed' }, {}, 0, stout);
-    expect(kinds(full)).toContain('too-full-to-cross');
+    expect(kinds(full)).toContain('knees-stay-apart');
     stays(full, sit(undefined, {}, 0, stout));
     const under = (mm: number) => ({ table: { ...situation.table!, undersideMm: seatMm + mm } });
     expect(kinds(sit({ feet: 'knees-crossed' }, under(320)))).toContain('knees-crossed');
     const meets = sit({ feet: 'knees-crossed' }, under(230));
     expect(kinds(meets)).toContain('table-over-knees');
     stays(meets, sit(undefined, under(230)));
-    const rail = { footRail: { topMm: 200, aheadOfHipMm: 470 }, ...under(230) };
-    expect(kinds(sit({ feet: 'knees-crossed' }, rail, 180))).toContain('feet-on-rail');
+  });
+
+  it('leaves the lower foot on a rail where feet would hang', () => {
+    const rail = { footRail: { topMm: 200, aheadOfHipMm: 470 } };
+    const [usual, crossed] = [sit(undefined, rail, 180), sit({ feet: 'knees-crossed' }, rail, 180)];
+    expect(kinds(crossed)).toContain('knees-crossed');
+    expect(crossed.notes).toContainEqual({ kind: 'feet-on-rail', side: 'right' });
+    expect(crossed.joints.rightAnkle[1]).toBeCloseTo(usual.joints.rightAnkle[1], 0);
+    expect(crossed.joints.leftAnkle[1]).toBeGreaterThan(crossed.joints.rightAnkle[1] + 40);
+    const hangs = sit({ feet: 'knees-crossed' }, {}, 60);
+    expect(hangs.notes).toContainEqual({ kind: 'feet-hang', valueMm: expect.closeTo(60, 0), side: 'right' });
+  });
+
+  it('crosses the knees of all but full builds, also where a seat is so low that thighs lift off it', () => {
+    for (const liftMm of [0, -80]) {
+      const crossing = builds().filter(([, means]) => {
+        const higher = means.popliteal_height - woman.popliteal_height;
+        return kinds(sit({ feet: 'knees-crossed' }, {}, higher + liftMm, means)).includes('knees-crossed');
+      });
+      for (const [, means] of crossing) {
+        const higher = means.popliteal_height - woman.popliteal_height;
+        const { leftToe, leftAnkle } = sit({ feet: 'knees-crossed' }, {}, higher + liftMm, means).joints;
+        expect(Math.min(leftToe[1], leftAnkle[1])).toBeGreaterThan(0);
+      }
+      const names = crossing.map(([name]) => name);
+      expect(names).toEqual(
+        expect.arrayContaining(
+          builds()
+            .map(([name]) => name)
+            .filter((name) => !name.startsWith('heavy')),
+        ),
+      );
+    }
+  });
+
+  it('keeps elbows near the sides where hands lie on crossed knees', () => {
+    for (const [name, means] of builds()) {
+      const higher = means.popliteal_height - woman.popliteal_height;
+      const elbow = (choice: PostureChoice) => sit(choice, {}, higher, means).joints.leftElbow[0];
+      const out = elbow({ arms: 'lap', feet: 'knees-crossed' }) - elbow({ arms: 'lap' });
+      expect([name, out < 75]).toEqual([name, true]);
+    }
   });
 
   it('puts hanging feet on a rail under them, and says when there is none in reach', () => {

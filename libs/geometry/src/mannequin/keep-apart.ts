@@ -1,13 +1,13 @@
 import type { Vec3 } from '../parts/part.ts';
 import type { Figure } from './figure.ts';
-import { legCores, nearestCore } from './leg-cores.ts';
+import { legCores, mirrored, nearestCore } from './leg-cores.ts';
 import { TOUCH, type SkinLevel } from './skin.ts';
-import { kneesCross, mirror, type Stance } from './stance.ts';
+import { kneesCross, type Stance } from './stance.ts';
 import { clamp, mix, mixPoints } from './vector.ts';
 
-/** Skins of two legs that lie on each other stay this far off the place where both are pressed alike. */
+/** Skins of two legs that lie on each other stay this far off the place where both are pressed alike. By eye. */
 const AIR_MM = 5;
-/** Skin further than this share of the other leg's radius off its middle is not looked at. */
+/** Skin further than this share of the other leg's radius off its middle is not looked at. By eye. */
 const NEAR_SHARE = 1.7;
 const HALVINGS = 10;
 
@@ -21,7 +21,7 @@ export function keepLegsApart(points: Float64Array, at: SkinLevel, figure: Figur
   if (!kneesCross(stance)) return;
   const coresOf = legCores(figure, stance);
   const left = coresOf(stance.legs[0]);
-  const right = coresOf(stance.legs[1]).map(({ at: p, radiusMm }) => ({ at: mirror(p), radiusMm }));
+  const right = mirrored(coresOf(stance.legs[1]));
   for (let v = 0; v < at.level.pointCount; v++) {
     const side = at.legSide[v]!;
     if (side === 0 || !(at.touch[v]! & TOUCH.otherLeg)) continue;

@@ -1,10 +1,11 @@
+import { toRoom, type BodyPlacement } from './body-placement.ts';
 import { TOES_OUT_RAD } from './crossed-legs.ts';
 import type { Figure } from './figure.ts';
-import { legCores, nearestCore, type LegCore } from './leg-cores.ts';
+import { legCores, mirrored, nearestCore, type LegCore } from './leg-cores.ts';
 import { legLine } from './leg-line.ts';
 import type { Legs } from './leg-posture.ts';
 import type { PoseNote } from './pose-note.ts';
-import { MEASURED_LEG, mirror, restKnee, type LegStance, type Stance } from './stance.ts';
+import { MEASURED_LEG, restKnee, type LegStance, type Stance } from './stance.ts';
 import { bellyFront } from './trunk-profile.ts';
 import { clamp, mix, mixPoints } from './vector.ts';
 
@@ -12,17 +13,18 @@ const rad = (deg: number): number => (deg * Math.PI) / 180;
 
 /** How far beyond the midline the upper knee lies, in shares of how far knees stand from it uncrossed; the lower one lies on it. By eye. */
 const BEYOND = 0.55;
-/** Lifts of the upper thigh that are tried; where none is enough the thighs are too full. Shop rule. */
+/** Lifts of the upper thigh that are tried; where none is enough the thighs are too full. By eye. */
 const LIFTS_RAD = Array.from({ length: 27 }, (_, i) => rad(4 + i));
-/** Of the way from the back to the knee, what the belly must leave free. Shop rule. */
+/** Of the way from the back to the knee, what the belly must leave free. By eye. */
 const FREE_OF_BELLY = 0.44;
 /** How much of their thickness legs give where they lie on each other, by section from the hip. By eye. */
 const GIVES = [0.6, 0.5, 0.3, 0.26, 0.24, 0.24, 0.24, 0.1];
 const KNEE_SECTION = 4;
+const HEEL_SECTION = 9;
 const BALL_SECTION = 12;
-/** Air between what does not give: ankles and shoes; between a raised knee and a table. Shop rule. */
+/** Air between what does not give: ankles and shoes; between a raised knee and a table. By eye. */
 const AIR_MM = 8;
-/** How far the hanging foot is stretched. */
+/** How far the hanging foot is stretched. By eye. */
 const STRETCHED_RAD = rad(22);
 /** How the upper shin likes to hang, forwards and across. By eye. */
 const CALM_DEG = 12;
@@ -68,7 +70,7 @@ export interface TableOver {
  *
  * @param f - the figure
  * @param legs - as they would stand or hang side by side
- * @param room - slope of the seat, the shoe, and the table over the lap where there is one
+ * @param room - where the body is, its shoe, and the table over the lap where there is one
  * @returns both legs, or why the knees cannot cross here
  * @source geometry of thighs and shins; how far is turned stays within the published range of the hip
  */
@@ -76,20 +78,24 @@ export function crossedKnees(
   f: Figure,
   legs: Legs,
   {
-    tiltRad,
+    placement,
     shoe,
     table,
-  }: { tiltRad: number; shoe: Pick<Stance, 'shoeMm' | 'forefootMm'>; table?: TableOver | undefined },
+  }: {
+    placement: BodyPlacement;
+    shoe: Pick<Stance, 'shoeMm' | 'forefootMm'>;
+    table?: TableOver | undefined;
+  },
 ): { legs: Stance['legs'] } | { why: PoseNote['kind'] } {
-  if (legs.kneesLift) return { why: 'too-low-to-cross' };
+  const { tiltRad } = placement;
   const [kneeX, , kneeZ] = restKnee(f);
-  if (kneeZ - bellyFront(f) < FREE_OF_BELLY * kneeZ) return { why: 'too-full-to-cross' };
+  if (kneeZ - bellyFront(f) < FREE_OF_BELLY * kneeZ) return { why: 'knees-stay-apart' };
   const lower: LegStance = { ...MEASURED_LEG, ...standing(f, legs) };
   const coresOf = legCores(f, shoe);
-  const under = coresOf(lower).map(({ at, radiusMm }) => ({ at: mirror(at), radiusMm }));
+  const under = mirrored(coresOf(lower));
   const upperOf = (liftRad: number, forwardsRad: number, inwardRad: number): LegStance => ({
-    thighRad: -liftRad,
-    acrossRad: acrossTo(f, -BEYOND * kneeX, -liftRad),
+    thighRad: legs.thighRad - liftRad,
+    acrossRad: acrossTo(f, -BEYOND * kneeX, legs.thighRad - liftRad),
     shinRad: tiltRad - forwardsRad,
     footRad: tiltRad - forwardsRad + STRETCHED_RAD,
     toesOutRad: 0,
@@ -102,10 +108,12 @@ export function crossedKnees(
     if (table && meetsTable(thigh, table)) return { why: 'table-over-knees' };
     for (const { forwards, across } of HANGS) {
       const upper = upperOf(lift, rad(forwards), rad(across));
-      if (clears(coresOf(upper), under, KNEE_SECTION, BALL_SECTION)) return { legs: [upper, lower] };
+      const cores = coresOf(upper);
+      if (!clears(cores, under, KNEE_SECTION, BALL_SECTION)) continue;
+      if (isOverFloor(cores, placement)) return { legs: [upper, lower] };
     }
   }
-  return { why: 'too-full-to-cross' };
+  return { why: 'knees-stay-apart' };
 }
 
 /** The lower leg: as it would stand, its knee on the midline, its toes still turned out. */
@@ -113,6 +121,10 @@ function standing(f: Figure, { thighRad, shinRad, footRad }: Legs): Partial<LegS
   const acrossRad = acrossTo(f, 0, thighRad);
   return { thighRad, acrossRad, shinRad, footRad, toesOutRad: TOES_OUT_RAD + acrossRad / 2 };
 }
+
+/** Whether a foot hangs over the floor and not in it. */
+const isOverFloor = (leg: readonly LegCore[], placement: BodyPlacement): boolean =>
+  leg.slice(HEEL_SECTION).every(({ at, radiusMm }) => toRoom(placement, at)[1] > radiusMm);
 
 /** Whether a raised thigh or its knee comes up against what lies over the lap. */
 function meetsTable(thigh: readonly LegCore[], { undersideMm, edgeMm }: TableOver): boolean {

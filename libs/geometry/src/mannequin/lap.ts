@@ -13,11 +13,13 @@ export interface Lap {
   lineX: (z: number) => number;
   /** How near to the midline a wrist may come. */
   leastX: number;
-  /** How far forward a wrist may lie. */
+  /** A wrist lies no further back than this. */
   nearMm: number;
+  /** A wrist lies no further forward than this. */
   farMm: number;
-  /** Where fingertips would lie, and how far inwards a hand turns for it at most, in shares of its length. */
+  /** Where fingertips would lie. */
   fingersX: (z: number) => number;
+  /** How far inwards a hand turns for that at most, in shares of its length. */
   mostInwards: number;
   /** How much lower fingers end than what is under them. */
   fingersDownMm: number;
@@ -25,14 +27,23 @@ export interface Lap {
   slopeAt: (x: number, z: number) => number;
 }
 
-/** Hands on crossed knees, in shares of a hand's length: how far before the knee each wrist lies, and the left one aside. */
-const ON_KNEE = [0.9, 0.5];
-const CLEAR_OF_KNEE = 1.6;
-const ASIDE = 0.1;
-/** How near to the belly a left wrist may lie, in shares of how far that stands out; what it is crowded by goes aside. */
-const BEFORE_BELLY = 0.78;
-const CROWDED_ASIDE = 0.2;
+/*
+ * Hands on crossed knees, all by eye and in shares of a hand's length: the right one lies on the knee that is up, the left
+ * one behind it along the outside of that thigh, so that neither lies on the other and elbows stay near the sides.
+ */
+/** How far behind the middle of the knee a wrist lies: furthest and nearest. */
+const RIGHT_WRIST = [1, 0.6] as const;
+const LEFT_WRIST = [1.6, 1.45] as const;
+const LEFT_OUT = 0.3;
+/** How much lower fingers end than a thigh is under them, mm. */
+const ON_FLAT_MM = 8;
+/** How much lower the fingers on the knee end than it rises. */
 const FINGERS_DOWN = 0.12;
+/** Hands turn inwards by at most this where they lie along a thigh. */
+const MOST_INWARDS = 0.6;
+/** The back of a hand tilts outwards by this, as a slope, and with what is under it, which is felt so far to both sides. */
+const TILT = 0.12;
+const FELT_MM = 12;
 
 /** A thigh as it lies in a stance: its upper side, and its middle line. */
 interface Thigh {
@@ -65,6 +76,7 @@ function bentThigh(f: Figure, { thighRad, acrossRad }: LegStance): Thigh {
       const ahead = (z - hipZ) * c - (x - hipX) * s;
       let along = hipZ + ahead;
       if (Math.abs(x0 - middle(hipZ + ahead).x) > first.half * 1.2) return -Infinity;
+      // How far forward it was then hangs on how high it was there: two rounds bring it within a millimetre or two.
       for (let i = 0; i < 2; i++) {
         along = hipZ + (ahead + (rest(x0, along) - hipY) * Math.sin(lift)) / Math.cos(lift);
         along = Math.min(along, kneeZ);
@@ -82,8 +94,8 @@ function bentThigh(f: Figure, { thighRad, acrossRad }: LegStance): Thigh {
  * @param f - the figure
  * @param legs - how both legs lie
  * @param side - 0 the left hand, 1 the right
- * @returns heights and lines as if the hand were the left one, millimetres. On crossed knees the left hand lies on the
- * thigh that is up, the right one on its knee
+ * @returns heights and lines as if the hand were the left one, millimetres. On crossed knees the left hand lies along
+ * the thigh that is up, the right one on its knee
  */
 export function lapUnder(f: Figure, legs: Stance['legs'], side: 0 | 1): Lap {
   const rest = thighSurface(f);
@@ -100,23 +112,29 @@ export function lapUnder(f: Figure, legs: Stance['legs'], side: 0 | 1): Lap {
       farMm: f.BKL - 0.85 * f.Ha,
       fingersX: () => 0.4 * f.Ha + 4,
       mostInwards: 0.28,
-      fingersDownMm: 8,
-      slopeAt: () => 0.12,
+      fingersDownMm: ON_FLAT_MM,
+      slopeAt: () => TILT,
     };
   }
   const top = (x: number, z: number): number => Math.max(rest(x, z), own.top(x, z), other.top(-x, z));
   const kneeZ = legLine(f, legs[0]).knee[2];
-  const slopeAt = (x: number, z: number): number => 0.12 + (top(x - 12, z) - top(x + 12, z)) / 24;
-  const anyhow = { top, leastX: -Infinity, mostInwards: 0.6, slopeAt };
+  const slopeAt = (x: number, z: number): number =>
+    TILT + (top(x - FELT_MM, z) - top(x + FELT_MM, z)) / (2 * FELT_MM);
+  const wrist = (behind: readonly [number, number]): { nearMm: number; farMm: number } => ({
+    nearMm: kneeZ - behind[0] * f.Ha,
+    farMm: kneeZ - behind[1] * f.Ha,
+  });
+  const anyhow = { top, leastX: -Infinity, mostInwards: MOST_INWARDS, slopeAt };
   if (side === 0) {
-    const farBack = kneeZ - CLEAR_OF_KNEE * f.Ha;
-    const nearMm = BEFORE_BELLY * bellyFront(f);
-    const farMm = Math.max(nearMm, farBack);
-    const aside = ASIDE * f.Ha + CROWDED_ASIDE * (farMm - farBack);
-    const lineX = (z: number): number => own.lineX(z) + aside;
-    return { ...anyhow, lineX, fingersX: lineX, nearMm, farMm, fingersDownMm: 8 };
+    const lineX = (z: number): number => own.lineX(z) + LEFT_OUT * f.Ha;
+    return { ...anyhow, ...wrist(LEFT_WRIST), lineX, fingersX: lineX, fingersDownMm: ON_FLAT_MM };
   }
   const lineX = (z: number): number => -other.lineX(z);
-  const [nearMm, farMm] = ON_KNEE.map((before) => kneeZ - before * f.Ha) as [number, number];
-  return { ...anyhow, lineX, fingersX: lineX, nearMm, farMm, fingersDownMm: FINGERS_DOWN * f.Ha };
+  return {
+    ...anyhow,
+    ...wrist(RIGHT_WRIST),
+    lineX,
+    fingersX: lineX,
+    fingersDownMm: FINGERS_DOWN * f.Ha,
+  };
 }

@@ -1,7 +1,7 @@
 import type { Vec3 } from '../parts/part.ts';
 import type { Figure } from './figure.ts';
 import { restLeg, sectionMover } from './leg-sections.ts';
-import { HIP_FORWARD_MM, type LegStance, type Stance } from './stance.ts';
+import { HIP_FORWARD_MM, mirror, type LegStance, type Stance } from './stance.ts';
 import { add, clamp, length, mix, scale, sub } from './vector.ts';
 
 /** The middle of a leg's flesh at one of its sections, as if it were the left one. */
@@ -15,7 +15,7 @@ export interface LegCore {
  *
  * @param f - the figure
  * @param shoe - what it stands on
- * @returns where they lie once the leg is bent, as if it were the left one; millimetres
+ * @returns what tells of a bent leg where they lie, as if it were the left one; millimetres
  */
 export function legCores(
   f: Figure,
@@ -37,6 +37,10 @@ export function legCores(
     return [root, ...rest.map(({ at, radiusMm }, i) => ({ at: moved(i + 1, at), radiusMm }))];
   };
 }
+
+/** The same of the right leg, where it is. */
+export const mirrored = (cores: readonly LegCore[]): LegCore[] =>
+  cores.map(({ at, radiusMm }) => ({ at: mirror(at), radiusMm }));
 
 /** The place of a leg's middle nearest to a point, how far it is, and how thick the leg is there. */
 interface Nearest {

@@ -7,9 +7,8 @@ export interface PoseNote {
     | 'feet-aside'
     | 'ankles-crossed'
     | 'knees-crossed'
-    /** Thighs or belly leave a knee no room to lie over the other. */
-    | 'too-full-to-cross'
-    | 'too-low-to-cross'
+    /** No way was found to draw one knee over the other: a full build, or too little height over the floor. */
+    | 'knees-stay-apart'
     | 'table-over-knees'
     | 'rail-out-of-reach'
     | 'slides-forward'

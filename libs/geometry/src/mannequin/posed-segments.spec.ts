@@ -59,8 +59,11 @@ const MARKS: readonly (readonly [name: string, solids: RegExp, axis: Axis, sign:
   ['sole', /left foot/, 1, -1],
 ];
 
+/** Legs that cross press each other and draw the skin along; arms lie over them. */
+const WITHIN_CROSSED_MM = 25;
+
 /** Differences of the solids and the near mesh, each looked for around the point the solids reach furthest with. */
-function differences(pose: MannequinPose): string[] {
+function differences(pose: MannequinPose, withinMm?: number): string[] {
   const { positions, indices, groups } = mannequinMesh(pose);
   const bare = groups.filter(({ tag }) => tag !== 'hand');
   const mesh = {
@@ -101,7 +104,7 @@ function differences(pose: MannequinPose): string[] {
       },
     );
     const more = sign * (end[axis]! - skin);
-    return Math.abs(more) < (WITHIN_ON_ARMS_MM[name] ?? WITHIN_MM)
+    return Math.abs(more) < (withinMm ?? WITHIN_ON_ARMS_MM[name] ?? WITHIN_MM)
       ? []
       : [`${name}: solids ${more.toFixed(1)} further than the skin`];
   });
@@ -136,6 +139,17 @@ describe('the simple solids reach as far as the near mesh in the postures people
         ),
     ],
   ];
+  const crossed: typeof postures = (['ankles-crossed', 'knees-crossed'] as const).map((feet) => [
+    feet,
+    (means) => sit(means, {}, { feet, arms: 'lap' }),
+  ]);
+  it.each(crossed)('%s, roughly', (_, pose) => {
+    const strays = people.flatMap(([who, means]) =>
+      differences(pose(means), WITHIN_CROSSED_MM).map((words) => `${who}: ${words}`),
+    );
+    expect(strays).toEqual([]);
+  });
+
   it.each(postures)('%s', (_, pose) => {
     const strays = people.flatMap(([who, means]) =>
       differences(pose(means)).map((words) => `${who}: ${words}`),

@@ -117,8 +117,8 @@ function armStretches(f: Figure, arm: ArmStance): Stretch[] {
 
 /**
  * Simple solids along a body, for distances and quick drawings. Where a check measures (top of the thigh, knee, back of
- * the knee, elbow, shoulders, belly, buttock, head, foot) they reach as far as the near mesh, within 3 mm; where legs
- * cross, within 20.
+ * the knee, elbow, shoulders, belly, buttock, head, foot) they reach as far as the near mesh, within 3 mm; of crossed legs
+ * and the arms over them within 25.
  *
  * @param f - the figure as wanted
  * @param stance - its bends

@@ -31,15 +31,17 @@ export function sittingLegs(
   const tiltRad = placement.tiltRad;
   const notes: PoseNote[] = [];
   const standing = legsFor(f, placement, shoe.shoeMm);
-  const knees = choice === 'knees-crossed' ? crossedKnees(f, standing, { tiltRad, shoe, table }) : undefined;
+  const hangs = standing.heelGapMm > 0.5;
+  const wantsRail = choice === 'rail' || ((choice === undefined || choice === 'knees-crossed') && hangs);
+  const railed = wantsRail && footRail ? legsOnRail(f, placement, shoe.shoeMm, footRail) : undefined;
+  const bends: Legs = railed ?? standing;
+  const knees = choice === 'knees-crossed' ? crossedKnees(f, bends, { placement, shoe, table }) : undefined;
   const crossed = knees && 'legs' in knees ? knees.legs : undefined;
   if (knees) notes.push({ kind: 'why' in knees ? knees.why : 'knees-crossed' });
-  const usual = choice === undefined || (knees !== undefined && !crossed);
-  const wantsRail = choice === 'rail' || (usual && standing.heelGapMm > 0.5);
-  const railed = wantsRail && footRail ? legsOnRail(f, placement, shoe.shoeMm, footRail) : undefined;
-  if (railed) notes.push({ kind: 'feet-on-rail' });
+  // Of crossed legs only the right one has its foot where both would be.
+  const side = crossed && { side: 'right' as const };
+  if (railed) notes.push({ kind: 'feet-on-rail', ...side });
   else if (choice === 'rail') notes.push({ kind: 'rail-out-of-reach' });
-  const bends: Legs = railed ?? standing;
   const ankles = choice === 'ankles-crossed';
   const moves = !railed && !ankles && !crossed && (feet.backMm > 0 || feet.leftMm !== 0);
   if (moves && feet.backMm > 0) notes.push({ kind: 'feet-drawn-back', valueMm: feet.backMm });
@@ -48,7 +50,7 @@ export function sittingLegs(
     notes.push({ kind: 'feet-aside', valueMm: Math.abs(feet.leftMm), side });
   }
   if (ankles) notes.push({ kind: 'ankles-crossed' });
-  if (bends.heelGapMm > 0.5) notes.push({ kind: 'feet-hang', valueMm: bends.heelGapMm });
+  if (bends.heelGapMm > 0.5) notes.push({ kind: 'feet-hang', valueMm: bends.heelGapMm, ...side });
   if (bends.kneesLift) notes.push({ kind: 'knees-lift' });
   const uncrossed = (): Stance['legs'] => {
     if (ankles) return crossedAnkles(f, bends, tiltRad, seatFrontMm);

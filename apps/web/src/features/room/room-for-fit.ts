@@ -71,9 +71,6 @@ export function useRoomForFit(): RoomForFit {
     const placeOf = new Map(picture.sheet.rows.map((row) => [row.sitterId, row.placeId]));
     const colourAt = coloursOf(picture.document, cast);
     const bodyOf = new Map(picture.bodies.map((body) => [body.placeId, body]));
-    const postureAt = new Map(
-      picture.document.seating.map(({ pieceId, place, posture }) => [`${pieceId}:${place}`, posture]),
-    );
     return {
       document: picture.document,
       sheet: picture.sheet,
@@ -87,7 +84,7 @@ export function useRoomForFit(): RoomForFit {
         if (!body || detail === 'verdicts') return '';
         return `${formatLength(body.statureMm, { ...style, feet: true })}${body.estimated ? ', est.' : ''}`;
       },
-      measuredAs: (sitterId) => sayMeasuredAs(postureAt.get(placeOf.get(sitterId) ?? ''), style),
+      measuredAs: (sitterId) => sayMeasuredAs(bodyOf.get(placeOf.get(sitterId) ?? ''), style),
       litCellId,
       light: (cellId) => store.getState().light(cellId),
       openCellId,

@@ -1,4 +1,6 @@
 import { formatLength, type LengthStyle, type PostureChoice } from '@settlewright/geometry';
+import type { SeatedBody } from '../picture.ts';
+import { choiceHad } from './try-posture.ts';
 
 export const TRUNK_WORDS = {
   back: 'Against the back',
@@ -19,7 +21,7 @@ const FEET_WORDS = {
   floor: 'Feet on the floor or hanging',
   rail: 'Feet on the rail',
   'ankles-crossed': 'Ankles crossed',
-  'knees-crossed': 'One knee over the other',
+  'knees-crossed': 'Knees crossed',
 } as const;
 
 /** "1½″ to the sitter’s left, 1″ back". */
@@ -45,7 +47,10 @@ export function sayChoice(choice: PostureChoice | undefined, style: LengthStyle)
 }
 
 /** What stands wherever a verdict meets a body that was posed by hand. */
-export const sayMeasuredAs = (choice: PostureChoice | undefined, style: LengthStyle): string => {
-  const shown = sayChoice(choice, style);
+export const sayMeasuredAs = (
+  body: Pick<SeatedBody, 'pose' | 'at'> | undefined,
+  style: LengthStyle,
+): string => {
+  const shown = body ? sayChoice(choiceHad(body), style) : '';
   return shown === '' ? '' : `Measured in the standard posture; shown ${shown}.`;
 };

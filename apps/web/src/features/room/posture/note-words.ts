@@ -6,7 +6,7 @@ export function sayNote({ kind, valueMm = 0, side }: PoseNote, style: LengthStyl
   const sided = (one: string, both = one) => (side ? `${side} ${one}` : both);
   switch (kind) {
     case 'feet-hang':
-      return `feet hang ${size}`;
+      return `${sided('foot hangs', 'feet hang')} ${size}`;
     case 'slides-forward':
       return `sits ${size} forward of the back to free the knees; the back is not supported`;
     case 'knees-lift':
@@ -16,7 +16,7 @@ export function sayNote({ kind, valueMm = 0, side }: PoseNote, style: LengthStyl
     case 'hands-on-lap':
       return sided('hand on the lap', 'hands on the lap');
     case 'feet-on-rail':
-      return 'feet on the rail';
+      return sided('foot on the rail', 'feet on the rail');
     case 'feet-drawn-back':
       return `feet drawn back ${size} from what is before them`;
     case 'feet-aside':
@@ -24,13 +24,11 @@ export function sayNote({ kind, valueMm = 0, side }: PoseNote, style: LengthStyl
     case 'ankles-crossed':
       return 'ankles crossed';
     case 'knees-crossed':
-      return 'one knee over the other';
-    case 'too-full-to-cross':
-      return 'thighs or belly leave no room to lay one knee over the other';
-    case 'too-low-to-cross':
-      return 'the seat is too low to lay one knee over the other';
+      return 'knees crossed, the left over the right';
+    case 'knees-stay-apart':
+      return 'crossed knees are not drawn for this build on this seat';
     case 'table-over-knees':
-      return 'the table leaves no room to lay one knee over the other';
+      return 'the table leaves no room for crossed knees';
     case 'rail-out-of-reach':
       return 'no rail in reach of the feet';
     case 'sits-upright':

@@ -15,6 +15,8 @@ import { sayNote } from './note-words.ts';
 import { refusalOf } from './try-posture.ts';
 
 const USUAL = 'usual';
+/** The word about a choice that cannot be had; gone once another is made. */
+const REFUSED = 'posture refused';
 type OrUsual<T extends string> = T | typeof USUAL;
 
 /** What is left of a choice once its empty parts are dropped; null for the posture that the place suggests. */
@@ -42,7 +44,8 @@ export function PostureForm({ picture, body }: Props) {
   const seat = picture.document.seating.find(({ pieceId, place }) => `${pieceId}:${place}` === body.placeId);
   const choice = seat?.posture ?? {};
   const { refused, feetHang } = useMemo(() => {
-    const why = (part: PostureChoice) => refusalOf(body, part);
+    const { trunk, nudge } = body.at.choice ?? {};
+    const why = (part: PostureChoice) => refusalOf(body, { trunk, nudge, ...part });
     const refused = new Map<string, PoseNote | undefined>();
     for (const feet of ['rail', 'knees-crossed'] as const) refused.set(feet, why({ feet }));
     for (const arms of ['table', 'cup', 'sill-left', 'sill-right'] as const) refused.set(arms, why({ arms }));
@@ -53,6 +56,7 @@ export function PostureForm({ picture, body }: Props) {
 
   function change(part: PostureChoice) {
     if (!seat) return;
+    toast.dismiss(REFUSED);
     const next = cleaned({ ...choice, ...part });
     const said = sayChoice(next ?? undefined, style);
     const step = said === '' ? `${name} in the standard posture` : `${name} ${said}`;
@@ -62,7 +66,7 @@ export function PostureForm({ picture, body }: Props) {
     const why = refused.get(key);
     if (!why) return change(part);
     const words = `Not chosen for ${name}: ${sayNote(why, style)}.`;
-    toast(words);
+    toast(words, { id: REFUSED });
     announce(words);
   }
   const detailOf = (key: string) => {
@@ -102,7 +106,7 @@ export function PostureForm({ picture, body }: Props) {
           { value: 'floor', words: feetHang ? 'Hanging' : 'On the floor, hanging where they do not reach' },
           { value: 'rail', words: 'On the rail', ...detailOf('rail') },
           { value: 'ankles-crossed', words: 'Ankles crossed' },
-          { value: 'knees-crossed', words: 'One knee over the other', ...detailOf('knees-crossed') },
+          { value: 'knees-crossed', words: 'Knees crossed', ...detailOf('knees-crossed') },
         ]}
         onChange={(value) => ask(value, { feet: value === USUAL ? undefined : value })}
       />

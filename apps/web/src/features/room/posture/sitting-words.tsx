@@ -4,14 +4,13 @@ import jointFile from '@settlewright/seed-data/joint-ranges.json';
 import { SOURCE_MARK_WORDS } from '@settlewright/anthropometry';
 import type { SeatedBody } from '../picture.ts';
 import { useSurroundings } from '../room-context.tsx';
-import { useRoom } from '../store.ts';
 import { sayMeasuredAs } from './choice-words.ts';
 import { sayNote } from './note-words.ts';
 
 const RANGES = readJointRanges(jointFile);
 
 /** Notes that say already where the feet are. */
-const FEET_SAID: readonly PoseNote['kind'][] = ['feet-on-rail', 'ankles-crossed', 'knees-crossed'];
+const FEET_SAID: readonly PoseNote['kind'][] = ['feet-on-rail', 'ankles-crossed'];
 
 const sayWarning = ({ joint, motion, side, deg, limitDeg, source }: JointWarning): string =>
   `${side ? `${side} ` : ''}${joint} ${motion} ${Math.round(deg)}°, beyond the ${limitDeg}° that most people manage (${source.cite}; ${SOURCE_MARK_WORDS[source.mark]})`;
@@ -21,23 +20,21 @@ const asSentence = (words: string): string => `${words.charAt(0).toUpperCase()}$
 /** How the sitter sits now, and what of it few people could hold. */
 export function SittingWords({ body }: { body: SeatedBody }) {
   const { style } = useSurroundings();
-  const choice = useRoom(({ document }) =>
-    document.seating.find((seat) => `${seat.pieceId}:${seat.place}` === body.placeId),
-  )?.posture;
   const notes = body.pose.notes.filter(({ kind }) => kind !== 'not-as-checked');
   const leans = notes.some(
     ({ kind }) => kind === 'sits-upright' || kind === 'slumps' || kind === 'slides-forward',
   );
+  const crossed = notes.some(({ kind }) => kind === 'knees-crossed');
   const words = [
     ...(leans ? [] : ['sits against the back']),
     ...notes.map((note) => sayNote(note, style)),
     ...(body.pose.heelGapMm > 0.5 || notes.some(({ kind }) => FEET_SAID.includes(kind))
       ? []
-      : ['feet on the floor']),
+      : [crossed ? 'right foot on the floor' : 'feet on the floor']),
     'head level',
   ];
   const warnings = jointWarnings(body.pose, RANGES);
-  const measuredAs = sayMeasuredAs(choice, style);
+  const measuredAs = sayMeasuredAs(body, style);
   return (
     <div>
       {body.forScale && (
