@@ -72,7 +72,8 @@ describe('how somebody sits', () => {
       .waitFor();
     expect(await words()).toBe(before);
     await page.locator('[data-piece="T1"]').click();
-    await page.locator('[data-scene]').press('Delete');
+    await page.locator('[data-scene][aria-label*="T1 selected"]').press('Delete');
+    await page.locator('[data-piece="T1"]').waitFor({ state: 'detached' });
     await chooseOf('Feet', /^Knees crossed$/);
     await expect.poll(words).toMatch(/knees crossed/);
     for (let i = 0; i < 2; i++) await page.getByRole('button', { name: /^Undo/ }).click();

@@ -4,7 +4,7 @@ import { personAt } from '../../test/seated-room.ts';
 import { jointWarnings } from '../mannequin/joint-angles.ts';
 import { readJointRanges } from '../mannequin/joint-ranges.ts';
 import { poseMannequin, type MannequinPose } from '../mannequin/pose.ts';
-import type { Part } from '../parts/part.ts';
+import type { Part, Vec3 } from '../parts/part.ts';
 import { feetClear } from './feet-clear.ts';
 import { gapBetween } from './gap.ts';
 import { segmentShape } from './solids.ts';
@@ -33,6 +33,10 @@ const feetOf = ({ segments }: MannequinPose) =>
   segments.filter(({ tag }) => tag === 'shoe').map((segment) => segmentShape(segment));
 const gapOfFeet = (one: MannequinPose, other: MannequinPose): number =>
   Math.min(...feetOf(one).flatMap((a) => feetOf(other).map((b) => gapBetween(a, b)!.distanceMm)));
+const lowerLegsOf = ({ segments }: MannequinPose) =>
+  segments.filter(({ name }) => /shin|foot/.test(name)).map((segment) => segmentShape(segment));
+const gapOfLegs = (one: MannequinPose, other: MannequinPose): number =>
+  Math.min(...lowerLegsOf(one).flatMap((a) => lowerLegsOf(other).map((b) => gapBetween(a, b)!.distanceMm)));
 const toe = (pose: MannequinPose): number => Math.max(...feetOf(pose).map(({ maxMm }) => maxMm[2]));
 
 const post = (zMm: number, xMm = 0): Part => ({
@@ -89,8 +93,14 @@ describe('feet keep clear of what is before them', () => {
 
   it('leaves feet that are clear, and those that look the same way', () => {
     expect(feetClear(apart(distance(-30)), [])).toEqual([STILL, STILL]);
-    const rows = [sit(man, 0, 0), sit(man, 2000, 0)];
-    expect(feetClear(rows, [])).toEqual([STILL, STILL]);
+    for (const facingRad of [0, 1.57, -1.57, 3]) {
+      const beside = [0, 240].map((mm) => {
+        const hipMm: Vec3 = [Math.cos(facingRad) * mm, man.popliteal_height + 10, -Math.sin(facingRad) * mm];
+        return sit(man, 0, facingRad, { frame: { hipMm, facingRad } });
+      }) as [MannequinPose, MannequinPose];
+      expect(gapOfFeet(...beside)).toBeLessThan(10);
+      expect(feetClear(beside, [])).toEqual([STILL, STILL]);
+    }
   });
 
   it('moves one alone where the other has crossed ankles or feet on a rail', () => {
@@ -99,6 +109,38 @@ describe('feet keep clear of what is before them', () => {
     const [stays, goes] = feetClear([crossed, sit(woman, zMm, Math.PI)], []);
     expect(stays).toEqual(STILL);
     expect(goes!.backMm).toBeGreaterThan(30);
+    expect(feetClear([sit(woman, zMm, Math.PI), crossed], [])).toEqual([goes, stays]);
+  });
+
+  it('never brings anybody nearer than they were, whoever was seated first', () => {
+    let seed = 1;
+    const random = (): number => (seed = (seed * 16807) % 2147483647) / 2147483647;
+    for (let n = 0; n < 40; n++) {
+      const seatMm = 380 + 120 * random();
+      const between = 900 + 350 * random();
+      const people = [0, 1].flatMap((row) =>
+        [0, 1, 2].map((column) => {
+          const means = personAt(random() < 0.5 ? 'men' : 'women', 1 + Math.floor(98 * random()));
+          const facingRad = row * Math.PI;
+          const hipMm: Vec3 = [column * (480 + 100 * random()), seatMm, row * between];
+          const feet = random() < 0.2 ? 'ankles-crossed' : undefined;
+          const over = { frame: { hipMm, facingRad }, choice: { feet } as const };
+          return { means, facingRad, over };
+        }),
+      );
+      const alone = people.map(({ means, facingRad, over }) => sit(means, 0, facingRad, over));
+      const feet = feetClear(alone, []);
+      const there = people.map(({ means, facingRad, over }, i) =>
+        sit(means, 0, facingRad, { ...over, feet: feet[i]! }),
+      );
+      for (let i = 0; i < 6; i++) {
+        for (let j = i + 1; j < 6; j++) {
+          const [was, is] = [gapOfLegs(alone[i]!, alone[j]!), gapOfLegs(there[i]!, there[j]!)];
+          expect(is).toBeGreaterThan(Math.min(was, 10) - 3);
+        }
+      }
+      expect(feetClear([...alone].reverse(), []).reverse()).toEqual(feet);
+    }
   });
 
   it('goes back from a post, as far as another behind the heels lets it', () => {

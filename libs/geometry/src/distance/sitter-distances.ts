@@ -137,8 +137,8 @@ function meetings(body: Body, other: Other): SitterGap[] {
   return inside.filter(({ distanceMm }) => distanceMm < -SOLIDS_OFF_MM);
 }
 
-/** Solids reach at most so far beyond the skin. */
-const SOLIDS_OFF_MM = 25;
+/** Solids reach at most so far beyond the skin, but for crossed legs. */
+const SOLIDS_OFF_MM = 10;
 
 function meetingsOf(
   body: Body,

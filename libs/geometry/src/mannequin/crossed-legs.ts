@@ -1,5 +1,5 @@
 import type { Figure } from './figure.ts';
-import type { Legs } from './leg-posture.ts';
+import { SHINS_BACK_RAD, toesDown, type Legs } from './leg-posture.ts';
 import { MEASURED_LEG, restAnkle, restKnee, type LegStance, type Stance } from './stance.ts';
 import { clamp, mix } from './vector.ts';
 
@@ -11,7 +11,6 @@ const POWER = 2.2;
 const TOES_DOWN_RAD = (28 * Math.PI) / 180;
 /** Furthest that a foot is stretched against its shin: well within the range of an ankle. */
 const STRETCHED_RAD = (40 * Math.PI) / 180;
-const BACK_RAD = (15 * Math.PI) / 180;
 const HEEL_OFF_MM = 10;
 
 /** Both legs alike. */
@@ -42,12 +41,12 @@ export function crossedAnkles(f: Figure, legs: Legs, tiltRad: number, seatFrontM
   const least = Math.acos(clamp(standsMm / level, -1, 1));
   const heelMm = (f.BPL + f.BKL) / 2 - 4 - 0.255 * f.FL;
   const most = Math.asin(clamp((heelMm - HEEL_OFF_MM - seatFrontMm) / level, 0, 1));
-  const back = least <= most ? Math.min(most, BACK_RAD) : -least;
+  const back = least <= most ? Math.min(most, SHINS_BACK_RAD) : -least;
   const apartMm = apartAtAnkles(f, shinMm, aside, beyond);
   const front = Math.asin(clamp(Math.sin(back) - apartMm / level, -0.85, 0));
   const legOf = (swing: number): LegStance => {
     const lifted = Math.max(0, standsMm - level * Math.cos(swing)) + legs.heelGapMm;
-    const toes = Math.min(TOES_DOWN_RAD, Math.asin(clamp(lifted / (0.72 * f.FL), 0, 1)));
+    const toes = toesDown(f, lifted, TOES_DOWN_RAD);
     const footRad = tiltRad + Math.min(toes, swing + STRETCHED_RAD);
     return {
       ...MEASURED_LEG,

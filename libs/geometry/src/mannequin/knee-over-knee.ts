@@ -11,7 +11,10 @@ import { clamp, mix, mixPoints } from './vector.ts';
 
 const rad = (deg: number): number => (deg * Math.PI) / 180;
 
-/** How far beyond the midline the upper knee lies, in shares of how far knees stand from it uncrossed; the lower one lies on it. By eye. */
+/**
+ * How far beyond the midline the upper knee lies, in shares of how far knees stand from it uncrossed; the lower one lies
+ * on it. By eye.
+ */
 const BEYOND = 0.55;
 /** Lifts of the upper thigh that are tried; where none is enough the thighs are too full. By eye. */
 const LIFTS_RAD = Array.from({ length: 27 }, (_, i) => rad(4 + i));

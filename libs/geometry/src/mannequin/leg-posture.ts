@@ -6,6 +6,8 @@ import { clamp, turnAboutX } from './vector.ts';
 
 const SHIN_FURTHEST_RAD = (28 * Math.PI) / 180;
 const TOES_DOWN_RAD = (18 * Math.PI) / 180;
+/** Furthest that shins are drawn back from upright. By eye, well within the range of a knee. */
+export const SHINS_BACK_RAD = (15 * Math.PI) / 180;
 
 /** A bar or step for the feet before the seat. */
 export interface FootRail {
@@ -52,8 +54,8 @@ function thighLiftedTo(f: Figure, placement: BodyPlacement, kneeMm: number): num
 }
 
 /** How far toes go down so that they reach what a sole is so far above. */
-const toesDown = (f: Figure, gapMm: number): number =>
-  Math.min(TOES_DOWN_RAD, Math.asin(clamp(gapMm / (0.72 * f.FL), 0, 1)));
+export const toesDown = (f: Figure, gapMm: number, mostRad = TOES_DOWN_RAD): number =>
+  Math.min(mostRad, Math.asin(clamp(gapMm / (0.72 * f.FL), 0, 1)));
 
 /** Thighs along the seat, feet on the floor if they reach it: shins forward when the seat is low, hanging when high. */
 export function legsFor(f: Figure, placement: BodyPlacement, shoeMm: number): Legs {

@@ -22,7 +22,7 @@ export interface PoseNote {
     | 'table-out-of-reach'
     | 'forearm-on-sill'
     | 'sill-out-of-reach'
-    /** Something was chosen; the checks answer for the posture without it. */
+    /** Something was chosen, or feet are out of the way of others; the checks answer for the posture without it. */
     | 'not-as-checked';
   valueMm?: number;
   /** Of one arm or leg alone; left out where it is true of both. Of feet that go aside, where to. */

@@ -136,7 +136,10 @@ export function poseMannequin(input: {
   };
   const { arms, notes: armNotes } = armsFor(f, bend, legs, rests, upOn(tilt), choice.arms);
   notes.push(...armNotes);
-  if (Object.values(choice).some((value) => value !== undefined)) notes.push({ kind: 'not-as-checked' });
+  const feetMoved = legNotes.some(({ kind }) => kind === 'feet-drawn-back' || kind === 'feet-aside');
+  if (feetMoved || Object.values(choice).some((value) => value !== undefined)) {
+    notes.push({ kind: 'not-as-checked' });
+  }
 
   const stance: Stance = { ...bend, headRad, legs, arms, ...shoe };
   const joints = bodyJoints(f, stance, placement);

@@ -2,6 +2,7 @@ import type { MeasureKey } from '@settlewright/anthropometry';
 import { describe, expect, it } from 'vitest';
 import { selfCrossings, visibleCrossings } from '../../test/self-crossings.ts';
 import { builds } from '../../test/survey-like-people.ts';
+import type { FeetMoved } from './leg-posture.ts';
 import { mannequinMesh, measuringMesh, type MannequinMesh } from './mesh.ts';
 import { poseMannequin } from './pose.ts';
 import type { PostureChoice } from '../room/posture-choice.ts';
@@ -13,6 +14,7 @@ function seated(
   atTable: boolean,
   choice?: PostureChoice,
   liftMm = 0,
+  feet?: FeetMoved,
 ): MannequinMesh {
   const seatMm = means.popliteal_height + SHOE_MM + liftMm;
   return mannequinMesh(
@@ -29,6 +31,7 @@ function seated(
       },
       sinkMm: 0,
       choice,
+      ...(feet && { feet }),
     }),
   );
 }
@@ -50,6 +53,13 @@ describe('a body does not run through itself where one can see it', () => {
   it.each(builds())('%s: one knee over the other where they can, on the same seats', (_, means) => {
     for (const liftMm of [0, -40, 60]) {
       const mesh = seated(means, false, { arms: 'lap', feet: 'knees-crossed' }, liftMm);
+      expect(visibleCrossings(mesh, selfCrossings(mesh)).map(({ at }) => at.map(Math.round))).toEqual([]);
+    }
+  });
+
+  it.each(builds())('%s: feet drawn back and aside, out of the way of others', (_, means) => {
+    for (const leftMm of [-80, 80]) {
+      const mesh = seated(means, false, { arms: 'lap' }, -40, { backMm: 90, leftMm });
       expect(visibleCrossings(mesh, selfCrossings(mesh)).map(({ at }) => at.map(Math.round))).toEqual([]);
     }
   });

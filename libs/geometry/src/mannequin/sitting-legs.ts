@@ -39,8 +39,8 @@ export function sittingLegs(
   const crossed = knees && 'legs' in knees ? knees.legs : undefined;
   if (knees) notes.push({ kind: 'why' in knees ? knees.why : 'knees-crossed' });
   // Of crossed legs only the right one has its foot where both would be.
-  const side = crossed && { side: 'right' as const };
-  if (railed) notes.push({ kind: 'feet-on-rail', ...side });
+  const ofRight = crossed && { side: 'right' as const };
+  if (railed) notes.push({ kind: 'feet-on-rail', ...ofRight });
   else if (choice === 'rail') notes.push({ kind: 'rail-out-of-reach' });
   const ankles = choice === 'ankles-crossed';
   const moves = !railed && !ankles && !crossed && (feet.backMm > 0 || feet.leftMm !== 0);
@@ -50,7 +50,7 @@ export function sittingLegs(
     notes.push({ kind: 'feet-aside', valueMm: Math.abs(feet.leftMm), side });
   }
   if (ankles) notes.push({ kind: 'ankles-crossed' });
-  if (bends.heelGapMm > 0.5) notes.push({ kind: 'feet-hang', valueMm: bends.heelGapMm, ...side });
+  if (bends.heelGapMm > 0.5) notes.push({ kind: 'feet-hang', valueMm: bends.heelGapMm, ...ofRight });
   if (bends.kneesLift) notes.push({ kind: 'knees-lift' });
   const uncrossed = (): Stance['legs'] => {
     if (ankles) return crossedAnkles(f, bends, tiltRad, seatFrontMm);

@@ -29,4 +29,7 @@ it('says what the checks measured only where somebody chose otherwise, and what 
     'Measured in the standard posture; shown hands on the lap.',
   );
   expect(sayMeasuredAs(body({ feet: 'rail' }, 'rail-out-of-reach'), inches)).toBe('');
+  expect(sayMeasuredAs(body({ arms: 'lap' }, 'feet-drawn-back'), inches)).toBe(
+    'Measured in the standard posture; shown hands on the lap, feet out of the way.',
+  );
 });

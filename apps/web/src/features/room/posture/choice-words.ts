@@ -51,6 +51,9 @@ export const sayMeasuredAs = (
   body: Pick<SeatedBody, 'pose' | 'at'> | undefined,
   style: LengthStyle,
 ): string => {
-  const shown = body ? sayChoice(choiceHad(body), style) : '';
+  if (!body) return '';
+  const moved = body.pose.notes.some(({ kind }) => kind === 'feet-drawn-back' || kind === 'feet-aside');
+  const had = sayChoice(choiceHad(body), style);
+  const shown = [...(had === '' ? [] : [had]), ...(moved ? ['feet out of the way'] : [])].join(', ');
   return shown === '' ? '' : `Measured in the standard posture; shown ${shown}.`;
 };
