@@ -48,7 +48,7 @@ const GROUPS: { title: string; keys: [keys: string, does: string][] }[] = [
 ];
 
 /** Every key the room knows, and the switch for those without Ctrl. */
-export function KeysDialog({ open, onClose }: { open: boolean; onClose: () => void }) {
+export default function KeysDialog({ open, onClose }: { open: boolean; onClose: () => void }) {
   const on = useSingleKeys((state) => state.on);
   return (
     <Dialog open={open} onClose={onClose} title="Keys" wide>

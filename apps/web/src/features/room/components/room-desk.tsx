@@ -26,13 +26,13 @@ import { DraftRefused } from './draft-refused.tsx';
 import { EmptySet } from './empty-set.tsx';
 import { IssueRevision } from './issue-revision.tsx';
 import { KeyPlan } from './key-plan.tsx';
-import { KeysDialog } from './keys-dialog.tsx';
 import { KnownDifferences } from './known-differences.tsx';
 import { NotesPanel } from './notes-panel.tsx';
 import { PiecesPanel } from './pieces-panel.tsx';
 import { SceneStage } from './scene-stage.tsx';
 import { SpecSentence } from './spec-sentence.tsx';
 
+const KeysDialog = lazy(() => import('./keys-dialog.tsx'));
 const HandFormPanel = lazy(() => import('../together/hand-form-panel.tsx'));
 
 interface Props {
@@ -169,7 +169,11 @@ export function RoomDesk({ lastRevision, foot, aboutPiece }: Props) {
           </Counted>
         </div>
         {!clientView && <Counted>{foot}</Counted>}
-        <KeysDialog open={helpOpen} onClose={() => setHelpOpen(false)} />
+        {helpOpen && (
+          <Suspense fallback={null}>
+            <KeysDialog open onClose={() => setHelpOpen(false)} />
+          </Suspense>
+        )}
       </div>
     </RoomContext>
   );

@@ -3,6 +3,7 @@ import { useEffect } from 'react';
 /** Parts of the room that come after it; all of them, so that an open page keeps working without a line. */
 const PARTS = [
   () => import('../components/conflict-screen.tsx'),
+  () => import('../components/keys-dialog.tsx'),
   () => import('../components/numbers-dialog.tsx'),
   () => import('../cushions-make/make-dialog.tsx'),
   () => import('../export/save-drawing.tsx'),
