@@ -3,18 +3,19 @@ import { add, dot, sub, unit } from '../mannequin/vector.ts';
 import type { Part } from '../parts/part.ts';
 import {
   AIR_MM,
-  back,
   BEHIND_MM,
   clearOf,
   gapOf,
   goneTo,
   legsOf,
+  stepBack,
   STEP_MM,
   type FootedPose,
   type Legs,
 } from './moving-legs.ts';
 import { boundsGap } from './shape.ts';
 import { partSurface } from './solids.ts';
+import type { Surface } from './surface.ts';
 
 /** Whoever is within this of straight ahead, as a cosine, is made room for. By eye. */
 const AHEAD = 0.5;
@@ -26,6 +27,71 @@ const ASIDE_MM = Array.from({ length: 8 }, (_, i) => STEP_MM * (i + 1)).flatMap(
 const GAIN_MM = 10;
 
 const hasAhead = (one: Legs, other: Legs): boolean => dot(unit(sub(other.at, one.at)), one.ahead) > AHEAD;
+
+/** Sitters whose legs may meet, and the parts near each. */
+interface Around {
+  parts: readonly (readonly Surface[])[];
+  pairs: readonly (readonly [number, number])[];
+}
+
+/** The others who may meet somebody's legs, where they are now. */
+const othersOf = (n: number, { pairs }: Around, now: readonly Legs[]): Legs[] =>
+  pairs.flatMap(([i, j]) => (i === n ? [now[j]!] : j === n ? [now[i]!] : []));
+
+/** Everybody who has somebody too near before them goes back, all at once, step by step. */
+function goBack(start: readonly Legs[], around: Around): Legs[] {
+  let now = [...start];
+  let lately = new Set(start.keys());
+  while (lately.size > 0) {
+    const going = new Set(
+      around.pairs.flatMap(([i, j]) => {
+        const [one, other] = [now[i]!, now[j]!];
+        if ((!lately.has(i) && !lately.has(j)) || gapOf(one, other) >= AIR_MM) return [];
+        return [...(hasAhead(one, other) ? [i] : []), ...(hasAhead(other, one) ? [j] : [])];
+      }),
+    );
+    const steps = new Map(
+      [...going].flatMap((n) => {
+        const gone = stepBack(now[n]!, around.parts[n]!, othersOf(n, around, now));
+        return gone ? [[n, gone] as const] : [];
+      }),
+    );
+    lately = new Set(steps.keys());
+    now = now.map((legs, n) => steps.get(n) ?? legs);
+  }
+  return now;
+}
+
+/** Those who face each other and are still too near go aside, the nearest first. */
+function goPast(start: readonly Legs[], around: Around): Legs[] {
+  const now = [...start];
+  const inTheWay = around.pairs
+    .map(([i, j]) => ({
+      i,
+      j,
+      gap: gapOf(now[i]!, now[j]!),
+      spot: Math.hypot(...add(now[i]!.at, now[j]!.at)),
+    }))
+    .filter(({ i, j, gap }) => gap < AIR_MM && dot(now[i]!.ahead, now[j]!.ahead) < OPPOSITE)
+    // Who was seated first does not decide.
+    .sort((a, b) => a.gap - b.gap || a.spot - b.spot);
+  const aside = (n: number, past: number, leftMm: number): Legs => {
+    const legs = now[n]!;
+    if (Math.abs(legs.gone.leftMm) >= Math.abs(leftMm)) return legs;
+    const others = othersOf(n, around, now).filter((other) => other !== now[past]);
+    return goneTo(legs, { ...legs.gone, leftMm }, around.parts[n]!, others) ?? legs;
+  };
+  for (const { i, j } of inTheWay) {
+    for (const leftMm of ASIDE_MM) {
+      const [one, other] = [aside(i, j, leftMm), aside(j, i, leftMm)];
+      if (gapOf(one, other) < AIR_MM) continue;
+      now[i] = one;
+      now[j] = other;
+      break;
+    }
+  }
+  return now;
+}
 
 /**
  * How far sitters move their feet so that they keep clear of the feet of those opposite and of what stands before them:
@@ -49,62 +115,15 @@ export function feetClear(poses: readonly FootedPose[], parts: readonly Part[]):
       return j > i && boundsGap(one.bounds, other.bounds) < reach ? [[i, j] as const] : [];
     }),
   );
-  const closest = pairs.map(([i, j]) => gapOf(start[i]!, start[j]!));
-  if (closest.every((gap) => gap >= AIR_MM)) return start.map(({ gone }) => gone);
-  const beside = start.map((_, n) => pairs.flatMap(([i, j]) => (i === n ? [j] : j === n ? [i] : [])));
-
-  let now = [...start];
-  const others = (n: number, but?: number): Legs[] =>
-    beside[n]!.filter((other) => other !== but).map((other) => now[other]!);
-  let lately = new Set(start.keys());
-  while (lately.size > 0) {
-    const going = new Set(
-      pairs.flatMap(([i, j]) => {
-        const [one, other] = [now[i]!, now[j]!];
-        if ((!lately.has(i) && !lately.has(j)) || gapOf(one, other) >= AIR_MM) return [];
-        return [...(hasAhead(one, other) ? [i] : []), ...(hasAhead(other, one) ? [j] : [])];
-      }),
-    );
-    const steps = [...going].flatMap((n) => {
-      const gone = goneTo(now[n]!, back(now[n]!), near[n]!, others(n));
-      return gone ? [[n, gone] as const] : [];
-    });
-    lately = new Set(steps.map(([n]) => n));
-    const stepped = new Map(steps);
-    now = now.map((legs, n) => stepped.get(n) ?? legs);
-  }
-
-  const inTheWay = pairs
-    .map(([i, j]) => ({
-      i,
-      j,
-      gap: gapOf(now[i]!, now[j]!),
-      spot: Math.hypot(...add(now[i]!.at, now[j]!.at)),
-    }))
-    .filter(({ i, j, gap }) => gap < AIR_MM && dot(now[i]!.ahead, now[j]!.ahead) < OPPOSITE)
-    // Whoever was seated first goes no other way for it.
-    .sort((a, b) => a.gap - b.gap || a.spot - b.spot);
-  for (const { i, j } of inTheWay) {
-    for (const leftMm of ASIDE_MM) {
-      const aside = (n: number, other: number): Legs => {
-        const legs = now[n]!;
-        if (Math.abs(legs.gone.leftMm) >= Math.abs(leftMm)) return legs;
-        return goneTo(legs, { ...legs.gone, leftMm }, near[n]!, others(n, other)) ?? legs;
-      };
-      const [one, other] = [aside(i, j), aside(j, i)];
-      if (gapOf(one, other) < AIR_MM) continue;
-      now[i] = one;
-      now[j] = other;
-      break;
-    }
-  }
-
+  const gaps = pairs.map(([i, j]) => gapOf(start[i]!, start[j]!));
+  if (gaps.every((gap) => gap >= AIR_MM)) return start.map(({ gone }) => gone);
+  const around = { parts: near, pairs };
+  const end = goPast(goBack(start, around), around);
   const gained = new Set(
-    pairs.flatMap(([i, j], p) =>
-      closest[p]! < AIR_MM && gapOf(now[i]!, now[j]!) > Math.min(AIR_MM - 1e-6, closest[p]! + GAIN_MM)
-        ? [i, j]
-        : [],
-    ),
+    pairs.flatMap(([i, j], p) => {
+      const [before, after] = [gaps[p]!, gapOf(end[i]!, end[j]!)];
+      return before < AIR_MM && (after >= AIR_MM || after > before + GAIN_MM) ? [i, j] : [];
+    }),
   );
-  return now.map(({ gone }, n) => (gained.has(n) ? gone : start[n]!.gone));
+  return end.map(({ gone }, n) => (gained.has(n) ? gone : start[n]!.gone));
 }

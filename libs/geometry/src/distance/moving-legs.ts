@@ -1,5 +1,6 @@
 import { SHINS_BACK_RAD, type FeetMoved } from '../mannequin/leg-posture.ts';
 import type { MannequinPose } from '../mannequin/pose.ts';
+import { feetPlaced } from '../mannequin/pose-note.ts';
 import type { MannequinSegment } from '../mannequin/segments.ts';
 import { add, along, dot, scale, sub } from '../mannequin/vector.ts';
 import type { Vec3 } from '../parts/part.ts';
@@ -20,12 +21,19 @@ export const STEP_MM = 10;
 type Limb = Extract<MannequinSegment, { kind: 'rounded-cone' }>;
 export type FootedPose = Pick<MannequinPose, 'segments' | 'placement' | 'notes' | 'heelGapMm'>;
 
+/** How long a shin is, and how far it leans forwards, from the knee down. */
+interface Reach {
+  lengthMm: number;
+  aheadMm: number;
+}
+
 /** The legs of a sitter, and how far their feet have gone. */
 export interface Legs {
   at: Vec3;
   ahead: Vec3;
   left: Vec3;
   limbs: readonly Limb[];
+  shin: Reach;
   heelGapMm: number;
   /** Feet that somebody put somewhere stay there. */
   placed: boolean;
@@ -33,21 +41,15 @@ export interface Legs {
   gone: FeetMoved;
   /** Feet, shins and thighs where they are now, as in `limbs`. */
   shapes: readonly Shape[];
-  /** Of feet and shins. */
+  /** Feet and shins alone, and the box around them. */
+  lower: readonly Shape[];
   bounds: Bounds;
 }
-
-const PLACED: readonly MannequinPose['notes'][number]['kind'][] = [
-  'feet-on-rail',
-  'ankles-crossed',
-  'knees-crossed',
-];
 
 const isThigh = ({ name }: Limb): boolean => name.endsWith('thigh');
 const isShin = ({ name }: Limb): boolean => name.endsWith('shin');
 
-/** How far and how high a shin reaches, from the knee down. */
-function reachOf(limbs: readonly Limb[], ahead: Vec3): { lengthMm: number; aheadMm: number } {
+function reachOf(limbs: readonly Limb[], ahead: Vec3): Reach {
   const shins = limbs.filter(isShin).map(({ fromMm, toMm }) => sub(toMm, fromMm));
   return {
     lengthMm: Math.min(...shins.map((shin) => Math.hypot(...shin))),
@@ -56,9 +58,14 @@ function reachOf(limbs: readonly Limb[], ahead: Vec3): { lengthMm: number; ahead
 }
 
 /** Legs whose feet have gone so far: feet go whole, shins with them from the knee, which rises where a shin stands up. */
-function moved(legs: Omit<Legs, 'gone' | 'shapes' | 'bounds'>, gone: FeetMoved): Legs {
-  const { limbs, ahead, left, heelGapMm } = legs;
-  const { lengthMm, aheadMm } = reachOf(limbs, ahead);
+function moved(legs: Omit<Legs, 'gone' | 'shapes' | 'lower' | 'bounds'>, gone: FeetMoved): Legs {
+  const {
+    limbs,
+    ahead,
+    left,
+    heelGapMm,
+    shin: { lengthMm, aheadMm },
+  } = legs;
   const stands = (reachMm: number): number => Math.sqrt(Math.max(0, lengthMm ** 2 - reachMm ** 2));
   const rise: Vec3 = [0, Math.max(0, stands(aheadMm - gone.backMm) - stands(aheadMm) - heelGapMm), 0];
   const by = along(scale(left, gone.leftMm), ahead, -gone.backMm);
@@ -67,7 +74,8 @@ function moved(legs: Omit<Legs, 'gone' | 'shapes' | 'bounds'>, gone: FeetMoved):
     if (isThigh(limb)) return segmentShape({ ...limb, toMm: add(toMm, rise) });
     return segmentShape({ ...limb, fromMm: add(fromMm, isShin(limb) ? rise : by), toMm: add(toMm, by) });
   });
-  return { ...legs, gone, shapes, bounds: boundsAround(shapes.filter((_, n) => !isThigh(limbs[n]!))) };
+  const lower = shapes.filter((_, n) => !isThigh(limbs[n]!));
+  return { ...legs, gone, shapes, lower, bounds: boundsAround(lower) };
 }
 
 export function legsOf({ segments, placement: { originMm, facingRad }, notes, heelGapMm }: FootedPose): Legs {
@@ -77,36 +85,33 @@ export function legsOf({ segments, placement: { originMm, facingRad }, notes, he
     (segment): segment is Limb =>
       segment.kind === 'rounded-cone' && / (thigh|shin|foot|foot inside)$/.test(segment.name),
   );
-  const { lengthMm, aheadMm } = reachOf(limbs, ahead);
+  const shin = reachOf(limbs, ahead);
   const legs = {
     at: originMm,
     ahead,
     left: [c, 0, -s] as Vec3,
     limbs,
+    shin,
     heelGapMm,
-    placed: notes.some(({ kind }) => PLACED.includes(kind)),
-    mostBackMm: Math.max(0, aheadMm + lengthMm * Math.sin(SHINS_BACK_RAD)),
+    placed: feetPlaced(notes),
+    mostBackMm: Math.max(0, shin.aheadMm + shin.lengthMm * Math.sin(SHINS_BACK_RAD)),
   };
   return moved(legs, { backMm: 0, leftMm: 0 });
 }
 
 /** How near feet and shins come to a surface, as far as it matters here. */
-const gapTo = ({ limbs, shapes }: Legs, surface: Surface): number =>
+const gapTo = ({ lower }: Legs, surface: Surface): number =>
   Math.min(
     AIR_MM,
-    ...shapes.flatMap((shape, n) =>
-      isThigh(limbs[n]!) ? [] : (surfaceGap(solidSurface(shape), surface, AIR_MM)?.distanceMm ?? AIR_MM),
-    ),
+    ...lower.map((shape) => surfaceGap(solidSurface(shape), surface, AIR_MM)?.distanceMm ?? AIR_MM),
   );
 
 /** The same of two sitters' feet and shins. */
 export function gapOf(one: Legs, other: Legs): number {
   if (boundsGap(one.bounds, other.bounds) >= AIR_MM) return AIR_MM;
-  const lower = ({ limbs, shapes }: Legs): Shape[] => shapes.filter((_, n) => !isThigh(limbs[n]!));
-  const theirs = lower(other);
   return Math.min(
     AIR_MM,
-    ...lower(one).flatMap((a) => theirs.map((b) => gapBetween(a, b, AIR_MM)?.distanceMm ?? AIR_MM)),
+    ...one.lower.flatMap((a) => other.lower.map((b) => gapBetween(a, b, AIR_MM)?.distanceMm ?? AIR_MM)),
   );
 }
 
@@ -124,8 +129,8 @@ export function goneTo(
       const air = limb.tag === 'shoe' ? BEHIND_MM : isThigh(limb) ? CONTACT_MM : AIR_MM;
       const gap = ({ shapes }: Legs) =>
         surfaceGap(solidSurface(shapes[n]!), part, air)?.distanceMm ?? Infinity;
-      const left = gap(after);
-      return left < air && left < gap(legs) - NOTHING_MM;
+      const room = gap(after);
+      return room < air && room < gap(legs) - NOTHING_MM;
     }),
   );
   if (meetsPart) return undefined;
@@ -136,11 +141,13 @@ export function goneTo(
   return meetsSomebody ? undefined : after;
 }
 
-export const back = ({ gone }: Legs): FeetMoved => ({ ...gone, backMm: gone.backMm + STEP_MM });
+/** The same for one step back. */
+export const stepBack = (legs: Legs, parts: readonly Surface[], others?: readonly Legs[]) =>
+  goneTo(legs, { ...legs.gone, backMm: legs.gone.backMm + STEP_MM }, parts, others);
 
 /** Back until a part is clear; where that cannot be had nothing is gained by going. */
 export function clearOf(part: Surface, legs: Legs, parts: readonly Surface[]): Legs {
   let going: Legs | undefined = legs;
-  while (going && gapTo(going, part) < AIR_MM) going = goneTo(going, back(going), parts);
+  while (going && gapTo(going, part) < AIR_MM) going = stepBack(going, parts);
   return going ?? legs;
 }

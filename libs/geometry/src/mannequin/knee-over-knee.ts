@@ -93,7 +93,7 @@ export function crossedKnees(
   const { tiltRad } = placement;
   const [kneeX, , kneeZ] = restKnee(f);
   if (kneeZ - bellyFront(f) < FREE_OF_BELLY * kneeZ) return { why: 'knees-stay-apart' };
-  const lower: LegStance = { ...MEASURED_LEG, ...standing(f, legs) };
+  const lower = standing(f, legs);
   const coresOf = legCores(f, shoe);
   const under = mirrored(coresOf(lower));
   const upperOf = (liftRad: number, forwardsRad: number, inwardRad: number): LegStance => ({
@@ -120,9 +120,10 @@ export function crossedKnees(
 }
 
 /** The lower leg: as it would stand, its knee on the midline, its toes still turned out. */
-function standing(f: Figure, { thighRad, shinRad, footRad }: Legs): Partial<LegStance> {
+function standing(f: Figure, { thighRad, shinRad, footRad }: Legs): LegStance {
   const acrossRad = acrossTo(f, 0, thighRad);
-  return { thighRad, acrossRad, shinRad, footRad, toesOutRad: TOES_OUT_RAD + acrossRad / 2 };
+  const toesOutRad = TOES_OUT_RAD + acrossRad / 2;
+  return { ...MEASURED_LEG, thighRad, acrossRad, shinRad, footRad, toesOutRad };
 }
 
 /** Whether a foot hangs over the floor and not in it. */

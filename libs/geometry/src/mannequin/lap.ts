@@ -97,44 +97,44 @@ function bentThigh(f: Figure, { thighRad, acrossRad }: LegStance): Thigh {
  * @returns heights and lines as if the hand were the left one, millimetres. On crossed knees the left hand lies along
  * the thigh that is up, the right one on its knee
  */
-export function lapUnder(f: Figure, legs: Stance['legs'], side: 0 | 1): Lap {
+export const lapUnder = (f: Figure, legs: Stance['legs'], side: 0 | 1): Lap =>
+  kneesCross({ legs }) ? crossedLap(f, legs, side) : flatLap(f, legs[side]);
+
+function flatLap(f: Figure, leg: LegStance): Lap {
+  const rest = thighSurface(f);
+  const bent = bentThigh(f, leg);
+  const kneeX = restKnee(f)[0];
+  return {
+    top: leg.thighRad === 0 ? rest : (x, z) => Math.max(rest(x, z), bent.top(x, z)),
+    lineX: () => kneeX,
+    leastX: 0.5 * f.Ha + 12,
+    nearMm: 0.62 * bellyFront(f),
+    farMm: f.BKL - 0.85 * f.Ha,
+    fingersX: () => 0.4 * f.Ha + 4,
+    mostInwards: 0.28,
+    fingersDownMm: ON_FLAT_MM,
+    slopeAt: () => TILT,
+  };
+}
+
+function crossedLap(f: Figure, legs: Stance['legs'], side: 0 | 1): Lap {
   const rest = thighSurface(f);
   const [own, other] = [bentThigh(f, legs[side]), bentThigh(f, legs[side === 0 ? 1 : 0])];
-  const near = 0.62 * bellyFront(f);
-  if (!kneesCross({ legs })) {
-    const top = (x: number, z: number): number => Math.max(rest(x, z), own.top(x, z));
-    const kneeX = restKnee(f)[0];
-    return {
-      top: legs[side].thighRad === 0 ? rest : top,
-      lineX: () => kneeX,
-      leastX: 0.5 * f.Ha + 12,
-      nearMm: near,
-      farMm: f.BKL - 0.85 * f.Ha,
-      fingersX: () => 0.4 * f.Ha + 4,
-      mostInwards: 0.28,
-      fingersDownMm: ON_FLAT_MM,
-      slopeAt: () => TILT,
-    };
-  }
   const top = (x: number, z: number): number => Math.max(rest(x, z), own.top(x, z), other.top(-x, z));
-  const kneeZ = legLine(f, legs[0]).knee[2];
   const slopeAt = (x: number, z: number): number =>
     TILT + (top(x - FELT_MM, z) - top(x + FELT_MM, z)) / (2 * FELT_MM);
-  const wrist = (behind: readonly [number, number]): { nearMm: number; farMm: number } => ({
-    nearMm: kneeZ - behind[0] * f.Ha,
-    farMm: kneeZ - behind[1] * f.Ha,
-  });
-  const anyhow = { top, leastX: -Infinity, mostInwards: MOST_INWARDS, slopeAt };
-  if (side === 0) {
-    const lineX = (z: number): number => own.lineX(z) + LEFT_OUT * f.Ha;
-    return { ...anyhow, ...wrist(LEFT_WRIST), lineX, fingersX: lineX, fingersDownMm: ON_FLAT_MM };
-  }
-  const lineX = (z: number): number => -other.lineX(z);
+  const kneeZ = legLine(f, legs[0]).knee[2];
+  const [behindMost, behindLeast] = side === 0 ? LEFT_WRIST : RIGHT_WRIST;
+  const lineX = (z: number): number => (side === 0 ? own.lineX(z) + LEFT_OUT * f.Ha : -other.lineX(z));
   return {
-    ...anyhow,
-    ...wrist(RIGHT_WRIST),
+    top,
     lineX,
+    leastX: -Infinity,
+    nearMm: kneeZ - behindMost * f.Ha,
+    farMm: kneeZ - behindLeast * f.Ha,
     fingersX: lineX,
-    fingersDownMm: FINGERS_DOWN * f.Ha,
+    mostInwards: MOST_INWARDS,
+    fingersDownMm: side === 0 ? ON_FLAT_MM : FINGERS_DOWN * f.Ha,
+    slopeAt,
   };
 }

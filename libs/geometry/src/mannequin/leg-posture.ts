@@ -34,6 +34,9 @@ export interface FeetMoved {
   leftMm: number;
 }
 
+/** Whether they have gone at all. */
+export const haveMoved = ({ backMm, leftMm }: FeetMoved): boolean => backMm > 0 || leftMm !== 0;
+
 const hipAxis: Vec3 = [0, HIP_HEIGHT_MM, HIP_FORWARD_MM];
 const shinOf = (f: Figure): number => restKnee(f)[1] - restAnkle(f)[1];
 

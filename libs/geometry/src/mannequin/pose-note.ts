@@ -28,3 +28,13 @@ export interface PoseNote {
   /** Of one arm or leg alone; left out where it is true of both. Of feet that go aside, where to. */
   side?: 'left' | 'right';
 }
+
+const PLACED: readonly PoseNote['kind'][] = ['feet-on-rail', 'ankles-crossed', 'knees-crossed'];
+
+/** Whether feet lie where somebody put them, or on a rail. */
+export const feetPlaced = (notes: readonly PoseNote[]): boolean =>
+  notes.some(({ kind }) => PLACED.includes(kind));
+
+/** Whether feet are shown out of the way of others. */
+export const feetOutOfTheWay = (notes: readonly PoseNote[]): boolean =>
+  notes.some(({ kind }) => kind === 'feet-drawn-back' || kind === 'feet-aside');

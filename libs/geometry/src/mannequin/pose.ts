@@ -10,7 +10,7 @@ import { bodySegments, type MannequinSegment } from './segments.ts';
 import type { FeetMoved, FootRail } from './leg-posture.ts';
 import { sittingLegs } from './sitting-legs.ts';
 import { HIP_FORWARD_MM, type Stance } from './stance.ts';
-import type { PoseNote } from './pose-note.ts';
+import { feetOutOfTheWay, type PoseNote } from './pose-note.ts';
 import { trunkFor, upOn } from './trunk-posture.ts';
 
 export type { PoseNote } from './pose-note.ts';
@@ -124,7 +124,7 @@ export function poseMannequin(input: {
       footRail: footRail && { ...footRail, aheadOfHipMm: footRail.aheadOfHipMm - aheadMm - forward },
       seatFrontMm: situation.effectiveDepthMm - forward,
       table: under && { undersideMm: under[1], edgeMm: under[2] },
-      feet: input.feet ?? { backMm: 0, leftMm: 0 },
+      feet: input.feet,
     },
     choice.feet,
   );
@@ -136,8 +136,7 @@ export function poseMannequin(input: {
   };
   const { arms, notes: armNotes } = armsFor(f, bend, legs, rests, upOn(tilt), choice.arms);
   notes.push(...armNotes);
-  const feetMoved = legNotes.some(({ kind }) => kind === 'feet-drawn-back' || kind === 'feet-aside');
-  if (feetMoved || Object.values(choice).some((value) => value !== undefined)) {
+  if (feetOutOfTheWay(notes) || Object.values(choice).some((value) => value !== undefined)) {
     notes.push({ kind: 'not-as-checked' });
   }
 

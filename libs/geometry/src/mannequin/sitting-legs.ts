@@ -3,8 +3,16 @@ import type { BodyPlacement } from './body-placement.ts';
 import { crossedAnkles, sideBySide } from './crossed-legs.ts';
 import type { Figure } from './figure.ts';
 import { crossedKnees, type TableOver } from './knee-over-knee.ts';
-import { legsFor, legsMoved, legsOnRail, type FeetMoved, type FootRail, type Legs } from './leg-posture.ts';
-import type { PoseNote } from './pose-note.ts';
+import {
+  haveMoved,
+  legsFor,
+  legsMoved,
+  legsOnRail,
+  type FeetMoved,
+  type FootRail,
+  type Legs,
+} from './leg-posture.ts';
+import { feetPlaced, type PoseNote } from './pose-note.ts';
 import type { Stance } from './stance.ts';
 
 /** What of a place bends the legs, as the body has it. */
@@ -16,7 +24,7 @@ interface Before {
   seatFrontMm: number;
   table: TableOver | undefined;
   /** How far feet that stand or hang keep away from what is before them. */
-  feet: FeetMoved;
+  feet: FeetMoved | undefined;
 }
 
 /**
@@ -43,19 +51,19 @@ export function sittingLegs(
   if (railed) notes.push({ kind: 'feet-on-rail', ...ofRight });
   else if (choice === 'rail') notes.push({ kind: 'rail-out-of-reach' });
   const ankles = choice === 'ankles-crossed';
-  const moves = !railed && !ankles && !crossed && (feet.backMm > 0 || feet.leftMm !== 0);
-  if (moves && feet.backMm > 0) notes.push({ kind: 'feet-drawn-back', valueMm: feet.backMm });
-  if (moves && feet.leftMm !== 0) {
-    const side = feet.leftMm > 0 ? 'left' : 'right';
-    notes.push({ kind: 'feet-aside', valueMm: Math.abs(feet.leftMm), side });
-  }
   if (ankles) notes.push({ kind: 'ankles-crossed' });
+  const going = feet && haveMoved(feet) && !feetPlaced(notes) ? feet : undefined;
+  if (going && going.backMm > 0) notes.push({ kind: 'feet-drawn-back', valueMm: going.backMm });
+  if (going && going.leftMm !== 0) {
+    const side = going.leftMm > 0 ? 'left' : 'right';
+    notes.push({ kind: 'feet-aside', valueMm: Math.abs(going.leftMm), side });
+  }
   if (bends.heelGapMm > 0.5) notes.push({ kind: 'feet-hang', valueMm: bends.heelGapMm, ...ofRight });
   if (bends.kneesLift) notes.push({ kind: 'knees-lift' });
   const uncrossed = (): Stance['legs'] => {
     if (ankles) return crossedAnkles(f, bends, tiltRad, seatFrontMm);
-    if (!moves) return sideBySide(bends);
-    const { leftRad, ...moved } = legsMoved(f, placement, shoe.shoeMm, bends, feet);
+    if (!going) return sideBySide(bends);
+    const { leftRad, ...moved } = legsMoved(f, placement, shoe.shoeMm, bends, going);
     const [left, right] = sideBySide(moved);
     return [
       { ...left, inwardRad: -leftRad },

@@ -12,6 +12,7 @@ import {
   deriveParts,
   feetClear,
   footRailOf,
+  haveMoved,
   measureSet,
   placeFrames,
   poseMannequin,
@@ -208,8 +209,8 @@ export function createPictureMaker(
       parts,
     );
     return sitting.map(({ placeId, pieceId, sitter, frame, body, sit, alone }, i): SeatedBody => {
-      const moves = feet[i] && (feet[i].backMm > 0 || feet[i].leftMm !== 0);
-      const { pose, at } = (moves && sit(feet[i])) || alone;
+      const moved = feet[i];
+      const { pose, at } = (moved && haveMoved(moved) && sit(moved)) || alone;
       return {
         placeId,
         pieceId,

@@ -1,4 +1,4 @@
-import { formatLength, type LengthStyle, type PostureChoice } from '@settlewright/geometry';
+import { feetOutOfTheWay, formatLength, type LengthStyle, type PostureChoice } from '@settlewright/geometry';
 import type { SeatedBody } from '../picture.ts';
 import { choiceHad } from './try-posture.ts';
 
@@ -52,8 +52,10 @@ export const sayMeasuredAs = (
   style: LengthStyle,
 ): string => {
   if (!body) return '';
-  const moved = body.pose.notes.some(({ kind }) => kind === 'feet-drawn-back' || kind === 'feet-aside');
   const had = sayChoice(choiceHad(body), style);
-  const shown = [...(had === '' ? [] : [had]), ...(moved ? ['feet out of the way'] : [])].join(', ');
+  const shown = [
+    ...(had === '' ? [] : [had]),
+    ...(feetOutOfTheWay(body.pose.notes) ? ['feet out of the way'] : []),
+  ].join(', ');
   return shown === '' ? '' : `Measured in the standard posture; shown ${shown}.`;
 };
